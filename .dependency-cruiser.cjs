@@ -1,0 +1,115 @@
+const TYPE_ONLY = { dependencyTypesNot: ['type-only'] };
+
+/**
+ * The walls of the house: dependencies point down, app → components, app → lib → db.
+ * A type may look over a wall, a value may not pass through.
+ *
+ * @type {import('dependency-cruiser').IConfiguration}
+ */
+module.exports = {
+  forbidden: [
+    {
+      name: 'rules-are-pure',
+      comment: 'lib/trade and lib/evidence: values in, verdict out. No database, clock, network, environment, React.',
+      severity: 'error',
+      from: { path: '^lib/(trade|evidence)/' },
+      to: { pathNot: '^lib/(trade|evidence)/' },
+    },
+    {
+      name: 'lib-is-framework-free',
+      comment: 'The only code that knows Next is in app/. React is for documents, mails and the browser hooks.',
+      severity: 'error',
+      from: { path: '^(lib|db)/', pathNot: '^lib/(pdf/|documents/|mail/|api/[^/]*hooks)' },
+      to: { path: ['node_modules/(next|react|react-dom)/', '^next(/|$)', '^react(/|$)', '^(app|components)/'], ...TYPE_ONLY },
+    },
+    {
+      name: 'lib-knows-no-screen',
+      severity: 'error',
+      from: { path: '^(lib|db|emails|fakes)/' },
+      to: { path: '^(app|components)/' },
+    },
+    {
+      name: 'pages-go-through-lib',
+      comment: 'Only the glue in app/_kit may open a transaction.',
+      severity: 'error',
+      from: { path: '^app/', pathNot: '^app/_kit/' },
+      to: { path: '^db/', ...TYPE_ONLY },
+    },
+    {
+      name: 'components-hold-no-data-access',
+      severity: 'error',
+      from: { path: '^components/' },
+      to: {
+        path: ['^(db|app|fakes|emails)/', '^lib/env', '^lib/[^/]+/(queries|endpoints)', 'node_modules/(pg|drizzle-orm)/'],
+        ...TYPE_ONLY,
+      },
+    },
+    {
+      name: 'components-never-reach-the-server',
+      comment: 'Not even through a file between: it would put the database client into the browser.',
+      severity: 'error',
+      from: { path: '^components/' },
+      to: { path: ['^db/', '^lib/env\\.ts$'], reachable: true },
+    },
+    {
+      name: 'schema-imports-only-vocabulary',
+      severity: 'error',
+      from: { path: '^db/schema/' },
+      to: { path: ['^db/client', '^lib/env\\.ts$', '^(app|components|emails|fakes)/'], reachable: true },
+    },
+    {
+      name: 'mails-are-props-in-html-out',
+      severity: 'error',
+      from: { path: '^emails/' },
+      to: { path: ['^db/', '^lib/[^/]+/(queries|endpoints)'], ...TYPE_ONLY },
+    },
+    {
+      name: 'fakes-have-one-door',
+      comment: 'We speak to them by their protocol, never by import; and they know nothing of us.',
+      severity: 'error',
+      from: { path: '^(app|components|emails|lib|db)/' },
+      to: { path: '^fakes/' },
+    },
+    {
+      name: 'fakes-know-nothing-of-us',
+      severity: 'error',
+      from: { path: '^fakes/' },
+      to: { path: '^(app|components|emails|lib|db)/' },
+    },
+    {
+      name: 'nothing-imports-tests',
+      severity: 'error',
+      from: { path: '^(app|components|emails|lib|db|fakes)/' },
+      to: { path: '^tests/' },
+    },
+    {
+      name: 'no-cycles',
+      severity: 'error',
+      from: {},
+      to: { circular: true, viaOnly: { dependencyTypesNot: ['type-only'] } },
+    },
+    {
+      name: 'everything-imported-exists',
+      severity: 'error',
+      from: {},
+      to: { couldNotResolve: true },
+    },
+    {
+      name: 'the-product-needs-no-test-tools',
+      severity: 'error',
+      from: { path: '^(app|components|emails|lib|db)/', pathNot: '^lib/stack/' },
+      to: { dependencyTypes: ['npm-dev'], ...TYPE_ONLY, pathNot: 'node_modules/@types/' },
+    },
+  ],
+  options: {
+    doNotFollow: { path: 'node_modules' },
+    tsConfig: { fileName: 'tsconfig.json' },
+    tsPreCompilationDeps: true,
+    enhancedResolveOptions: {
+      exportsFields: ['exports'],
+      conditionNames: ['import', 'require', 'node', 'default', 'types'],
+      mainFields: ['module', 'main', 'types'],
+    },
+    cache: { folder: 'node_modules/.cache/dependency-cruiser', strategy: 'content' },
+  },
+};
