@@ -1,25 +1,21 @@
+import { existsSync } from 'node:fs';
+import { join } from 'node:path';
 import { drizzle } from 'drizzle-orm/node-postgres';
-import { migrate as applyMigrations } from 'drizzle-orm/node-postgres/migrator';
-import path from 'node:path';
-import pg from 'pg';
+import { migrate } from 'drizzle-orm/node-postgres/migrator';
+import { Client } from 'pg';
 
-import { installQueues } from '@/lib/jobs/queue';
+const FOLDER = 'drizzle';
+/** Any number will do, as long as it is always this one. */
+const LOCK = 4_632_001;
 
-import { grantStatements } from './grants';
-
-/** Brings the database at `ownerUrl` to the newest schema, grants and job queues. Safe to repeat. */
-export async function migrate(ownerUrl: string): Promise<void> {
-  const client = new pg.Client({ connectionString: ownerUrl });
+/** Applies what is missing. Several machines may start at once: the second waits and finds nothing left to do. */
+export async function applyMigrations(ownerUrl: string): Promise<void> {
+  if (!existsSync(join(FOLDER, 'meta', '_journal.json'))) return;
+  const client = new Client({ connectionString: ownerUrl, connectionTimeoutMillis: 15_000 });
   await client.connect();
   try {
-    // Two starts at once: the second waits and then finds nothing to do.
-    await client.query('select pg_advisory_lock(4600)');
-    await applyMigrations(drizzle(client), { migrationsFolder: path.join(import.meta.dirname, '..', 'drizzle') });
-    const { rows } = await client.query<{ tablename: string }>(`select tablename from pg_tables where schemaname = 'public'`);
-    await client.query('begin');
-    for (const statement of grantStatements(rows.map((row) => row.tablename))) await client.query(statement);
-    await client.query('commit');
-    await installQueues(ownerUrl);
+    await client.query('select pg_advisory_lock($1)', [LOCK]);
+    await migrate(drizzle(client), { migrationsFolder: FOLDER });
   } finally {
     await client.end();
   }
