@@ -1,0 +1,125 @@
+import { existsSync } from 'node:fs';
+import { join } from 'node:path';
+import { CannotStart } from '@/db/cannot-start';
+import { type Cluster, openCluster } from '@/db/cluster';
+import { buildWeb } from './build';
+import { loadDemoData, resetDatabase } from './demo-data';
+import { type Part, standIns, type WebMode, webPart, workerPart } from './parts';
+import { prepareDatabase } from './prepare-database';
+import { claimRun } from './run-record';
+import { demandFreePorts, lastLines, type RunningPart, startPart } from './running-part';
+import { type StackSettings } from './settings';
+
+export interface StackOptions {
+  readonly settings: StackSettings;
+  readonly report: (line: string) => void;
+  /** Called once, with a sentence, when a part dies that nobody asked to stop. */
+  readonly onDeath: (sentence: string) => void;
+}
+
+const STAND_IN_MS = 30_000;
+const BUILT_MS = 60_000;
+const DEV_MS = 60_000;
+
+/** Everything that runs together, brought up step by step and taken down in reverse. */
+export class Stack {
+  readonly #options: StackOptions;
+  readonly #running: RunningPart[] = [];
+  #claim: Awaited<ReturnType<typeof claimRun>> | undefined;
+  #cluster: Cluster | undefined;
+  #stopping: Promise<void> | undefined;
+
+  constructor(options: StackOptions) {
+    this.#options = options;
+  }
+
+  get superUrl(): string | undefined {
+    return this.#cluster?.superUrl;
+  }
+
+  async claim(): Promise<void> {
+    const { settings, report } = this.#options;
+    this.#claim = await claimRun(settings.dataFolder, report);
+  }
+
+  async openDatabase({ reset }: { reset: boolean }): Promise<void> {
+    const { settings, report } = this.#options;
+    const ownerUrl = this.#ownerUrl();
+    if (settings.runsHere.database) {
+      this.#cluster = await openCluster({
+        folder: settings.clusterFolder,
+        port: settings.ports.database,
+        throwAway: settings.kind === 'test',
+        report,
+      });
+      if (reset) await resetDatabase(this.#cluster.superUrl, ownerUrl);
+    }
+    await prepareDatabase(ownerUrl);
+  }
+
+  async startStandIns(): Promise<void> {
+    await Promise.all(standIns(this.#options.settings).map((part) => this.#start(part, STAND_IN_MS)));
+  }
+
+  /** Into a database of our own only: its well-known passwords have no business in anybody else's. */
+  async loadDemo(): Promise<void> {
+    const { settings, report } = this.#options;
+    if (!this.#cluster) return;
+    const ownerUrl = this.#ownerUrl();
+    await loadDemoData({ superUrl: this.#cluster.superUrl, ownerUrl, env: settings.env, report });
+  }
+
+  async build({ force = false } = {}): Promise<void> {
+    await buildWeb(this.#options.settings, { force, report: this.#options.report });
+  }
+
+  async startProduct(mode: WebMode): Promise<void> {
+    const { settings } = this.#options;
+    const timeoutMs = mode === 'dev' ? DEV_MS : BUILT_MS;
+    await Promise.all([workerPart(settings, mode), webPart(settings, mode)].map((part) => this.#start(part, timeoutMs)));
+  }
+
+  /** Stops what this stack started and nothing else. Safe to call again. */
+  stop(): Promise<void> {
+    this.#stopping ??= this.#stopAll();
+    return this.#stopping;
+  }
+
+  async #start(part: Part, timeoutMs: number): Promise<void> {
+    const { settings, report, onDeath } = this.#options;
+    const script = part.args.at(-1) ?? '';
+    if (script.endsWith('.ts') && !existsSync(script)) return report(`No ${part.name}: ${script} does not exist.`);
+
+    await demandFreePorts(part);
+    if (this.#stopping) throw new CannotStart('Stopped while starting.');
+    const logFile = join(settings.dataFolder, 'logs', `${part.name}.log`);
+    const running = startPart(part, { env: settings.env, logFile });
+    this.#running.push(running);
+    this.#claim?.remember(running.pid);
+    try {
+      await running.isUp(timeoutMs);
+    } catch (error) {
+      // While somebody is editing, a part that does not answer yet is what he is working on.
+      if (!part.mayBeBroken || running.hasEnded()) throw error;
+      report(error instanceof Error ? error.message : String(error));
+    }
+
+    void running.ended.then((how) => {
+      if (!this.#stopping) onDeath(`${part.name} ${how}. The end of ${logFile}:\n${lastLines(logFile)}`);
+    });
+  }
+
+  async #stopAll(): Promise<void> {
+    // The product first: it may still want to finish a request or a job with the services below it.
+    const product = this.#running.filter(({ part }) => part.name === 'web' || part.name === 'worker');
+    const services = this.#running.filter((running) => !product.includes(running));
+    await Promise.all(product.map((running) => running.stop()));
+    await Promise.all(services.map((running) => running.stop()));
+    await this.#cluster?.stop();
+    this.#claim?.release();
+  }
+
+  #ownerUrl(): string {
+    return process.env['DATABASE_OWNER_URL'] ?? '';
+  }
+}
