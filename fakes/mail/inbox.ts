@@ -1,12 +1,13 @@
 import type { IncomingMessage, ServerResponse } from 'node:http';
 import { answerHtml, answerJson, answerWith } from '../answer';
+import type { Answer } from '../answer';
 import { chosenMode } from '../control';
 import { readBody } from '../read-body';
 import { framedHtml, inboxPage, messagePage } from './inbox-page';
 import type { MessageView } from './inbox-page';
 import type { MailStore } from './mail-store';
 import { readAttachment } from './message';
-import type { StoredMessage } from './message';
+import type { FoundAttachment, StoredMessage } from './message';
 import { MAIL_FAILURES } from './smtp';
 import type { MailFailure } from './smtp';
 
@@ -32,7 +33,7 @@ export async function serveInbox(inbox: Inbox, request: IncomingMessage, respons
 
   if (section === 'health') return answerJson(response, 200, { ok: true, failure: inbox.failure() });
   if (section === 'control' && request.method === 'POST') return control(inbox, request, response);
-  if (section === '') return answerHtml(response, 200, inboxPage(inbox.store.list({ to }), to));
+  if (section === '') return answerHtml(response, inboxPage(inbox.store.list({ to }), to));
   if (section === 'messages' && id === undefined) {
     const messages = inbox.store.list({ to, limit: Number(searchParams.get('limit') ?? 500) });
     if (request.method === 'DELETE') await inbox.store.remove(messages);
@@ -51,7 +52,7 @@ async function showMessage(inbox: Inbox, message: StoredMessage, asked: string |
   const fallback: MessageView = message.html ? 'html' : 'text';
   const view: MessageView = asked === 'raw' || asked === 'text' || (asked === 'html' && message.html) ? asked : fallback;
   const raw = view === 'raw' ? (await inbox.store.raw(message)).toString('utf8') : '';
-  answerHtml(response, 200, messagePage(message, view, raw));
+  answerHtml(response, messagePage(message, view, raw));
 }
 
 async function servePart(
@@ -62,24 +63,29 @@ async function servePart(
 ): Promise<void> {
   if (part === undefined) return answerJson(response, 200, message);
   if (part === 'html') {
-    return answerHtml(response, 200, framedHtml(message), {
+    return answerHtml(response, framedHtml(message), {
       'content-security-policy': 'sandbox allow-popups allow-popups-to-escape-sandbox allow-top-navigation-by-user-activation',
     });
   }
   const raw = await inbox.store.raw(message);
-  if (part === 'raw') return answerWith(response, 200, 'text/plain; charset=utf-8', raw);
+  if (part === 'raw') return answerWith(response, { status: 200, type: 'text/plain; charset=utf-8', body: raw });
   if (part === 'attachments') {
     const found = await readAttachment(raw, Number(index));
-    if (found) return answerWith(response, 200, found.attachment.mediaType, found.content, attachmentHeaders(found.attachment.fileName));
+    if (found) return answerWith(response, attachmentAnswer(found));
   }
   answerJson(response, 404, { error: 'The message has no such part.' });
 }
 
-/** Shown in the browser, never run: a mailed file may be anything. */
-function attachmentHeaders(fileName: string): Record<string, string> {
+/** Shown in the browser, never run: a mailed file may be anything. The PDF viewer refuses a sandbox, and runs nothing of ours. */
+function attachmentAnswer({ attachment, content }: FoundAttachment): Answer {
   return {
-    'content-disposition': `inline; filename*=UTF-8''${encodeURIComponent(fileName)}`,
-    'content-security-policy': "default-src 'none'; img-src 'self'; style-src 'unsafe-inline'; object-src 'self'; plugin-types application/pdf",
+    status: 200,
+    type: attachment.mediaType,
+    body: content,
+    headers: {
+      'content-disposition': `inline; filename*=UTF-8''${encodeURIComponent(attachment.fileName)}`,
+      ...(attachment.mediaType === 'application/pdf' ? {} : { 'content-security-policy': 'sandbox' }),
+    },
   };
 }
 

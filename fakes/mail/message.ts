@@ -24,8 +24,14 @@ export interface StoredMessage {
   headers: Record<string, string>;
   text: string;
   html: string;
+  /** Every address the reader could follow, once, in order. */
   links: string[];
   attachments: StoredAttachment[];
+}
+
+export interface FoundAttachment {
+  attachment: StoredAttachment;
+  content: Buffer;
 }
 
 export interface Envelope {
@@ -35,7 +41,7 @@ export interface Envelope {
 
 export async function readMessage(id: string, raw: Buffer, envelope: Envelope, receivedAt: Date): Promise<StoredMessage> {
   const mail = await simpleParser(raw, { skipImageLinks: true, skipTextToHtml: true });
-  const html = mail.html === false ? '' : mail.html;
+  const html = mail.html || '';
   return {
     id,
     receivedAt: receivedAt.toISOString(),
@@ -55,7 +61,7 @@ export async function readMessage(id: string, raw: Buffer, envelope: Envelope, r
 }
 
 /** The attachment's bytes, read again from the message as received: they are not stored twice. */
-export async function readAttachment(raw: Buffer, index: number): Promise<{ attachment: StoredAttachment; content: Buffer } | null> {
+export async function readAttachment(raw: Buffer, index: number): Promise<FoundAttachment | null> {
   const mail = await simpleParser(raw);
   const found = mail.attachments[index];
   return found ? { attachment: describeAttachment(found), content: found.content } : null;

@@ -47,7 +47,7 @@ export async function startStorageServer(options: StorageServerOptions): Promise
     directory: dir,
     silent: true,
     vhostBuckets: false,
-    configureBuckets: [{ name: bucket, configs: [corsConfiguration(origins)] }],
+    configureBuckets: [{ name: bucket, configs: origins.length > 0 ? [corsConfiguration(origins)] : [] }],
   });
   keepWholeObjectsOnly(s3);
   // An upload cut half way is an ordinary event here; without a listener Koa would print each one as a crash.
@@ -87,7 +87,7 @@ function headerOf(request: IncomingMessage, name: string): string | undefined {
 }
 
 function answerError(response: ServerResponse, error: S3Error): void {
-  answerWith(response, error.status, 'application/xml', error.toXML());
+  answerWith(response, { status: error.status, type: 'application/xml', body: error.toXML() });
 }
 
 async function setFailure(request: IncomingMessage, response: ServerResponse, set: (mode: Failure) => void): Promise<void> {
