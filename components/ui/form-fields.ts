@@ -70,7 +70,8 @@ function asList(given: unknown): unknown {
 }
 
 const PLAIN = /^[+-]?(\d+(\.\d*)?|\.\d+)$/;
-const WITH_THOUSANDS = /^[+-]?\d{1,3}(,\d{3})+(\.\d+)?$/;
+/** Not from a zero: `0,063` is how half the world writes a thickness, and 63 would be a thousand times too much. */
+const WITH_THOUSANDS = /^[+-]?[1-9]\d{0,2}(,\d{3})+(\.\d+)?$/;
 
 /** `undefined` for nothing, `null` for something that is no number. A comma counts only between thousands. */
 function readNumber(typed: string | number): number | null | undefined {

@@ -1,0 +1,115 @@
+/** A day of the calendar, `2026-04-16`: the same day wherever it is read. */
+export type CalendarDay = string;
+
+/** Whose clock: the shop's zone, and the moment the words are made. */
+export interface Clock {
+  zone: string;
+  now: Date;
+}
+
+const MS_PER_DAY = 86_400_000;
+const DAY_ONLY = /^(\d{4})-(\d{2})-(\d{2})$/;
+
+/** `Thu 16 Apr`; with the year when it is not this one. */
+export function dayWords(when: Date | CalendarDay, clock: Clock): string {
+  const { weekday, day, month, year } = partsOf(when, clock.zone);
+  return `${weekday} ${day} ${month}${yearUnlessThis(year, clock)}`;
+}
+
+/** `16 Apr`: in columns and beside names. */
+export function shortDayWords(when: Date | CalendarDay, clock: Clock): string {
+  const { day, month, year } = partsOf(when, clock.zone);
+  return `${day} ${month}${yearUnlessThis(year, clock)}`;
+}
+
+/** `08:40` */
+export function timeWords(when: Date, zone: string): string {
+  const { hour, minute } = partsOf(when, zone);
+  return `${hour}:${minute}`;
+}
+
+/** `Wed 15 Apr 16:40` */
+export function momentWords(when: Date, clock: Clock): string {
+  return `${dayWords(when, clock)} ${timeWords(when, clock.zone)}`;
+}
+
+/** The day it is in a zone. */
+export function calendarDay(when: Date, zone: string): CalendarDay {
+  const { year, monthNumber, day } = partsOf(when, zone);
+  return `${year}-${monthNumber}-${day.padStart(2, '0')}`;
+}
+
+/** Whole days from today until then; negative when it is past. */
+export function daysUntil(when: CalendarDay, { zone, now }: Clock): number {
+  return Math.round((midnightUtc(when) - midnightUtc(calendarDay(now, zone))) / MS_PER_DAY);
+}
+
+/** `6 d late`, `today`, `in 5 d`. */
+export function untilWords(when: CalendarDay, clock: Clock): string {
+  const days = daysUntil(when, clock);
+  if (days === 0) return 'today';
+  return days < 0 ? `${-days} d late` : `in ${days} d`;
+}
+
+export function addDays(when: CalendarDay, days: number): CalendarDay {
+  return new Date(midnightUtc(when) + days * MS_PER_DAY).toISOString().slice(0, 10);
+}
+
+interface DayParts {
+  weekday: string;
+  day: string;
+  month: string;
+  monthNumber: string;
+  year: string;
+  hour: string;
+  minute: string;
+}
+
+function partsOf(when: Date | CalendarDay, zone: string): DayParts {
+  const [moment, readIn] = typeof when === 'string' ? [new Date(midnightUtc(when)), 'UTC'] : [when, zone];
+  const found = new Map(formatIn(readIn).formatToParts(moment).map((part) => [part.type, part.value]));
+  const text = (type: Intl.DateTimeFormatPartTypes) => found.get(type) ?? '';
+  const monthNumber = text('month');
+  return {
+    weekday: text('weekday'),
+    day: text('day'),
+    month: MONTHS[Number(monthNumber) - 1] ?? '',
+    monthNumber,
+    year: text('year'),
+    hour: text('hour'),
+    minute: text('minute'),
+  };
+}
+
+/** Named here because locales disagree on "Sep" and "Sept", and a column of days must line up. */
+const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'];
+
+const formats = new Map<string, Intl.DateTimeFormat>();
+
+/** Making a format costs more than using it a hundred times. */
+function formatIn(zone: string): Intl.DateTimeFormat {
+  const known = formats.get(zone);
+  if (known) return known;
+  const made = new Intl.DateTimeFormat('en-US', {
+    timeZone: zone,
+    weekday: 'short',
+    day: 'numeric',
+    month: '2-digit',
+    year: 'numeric',
+    hour: '2-digit',
+    minute: '2-digit',
+    hourCycle: 'h23',
+  });
+  formats.set(zone, made);
+  return made;
+}
+
+function midnightUtc(day: CalendarDay): number {
+  const [, year, month, date] = DAY_ONLY.exec(day) ?? [];
+  if (!year || !month || !date) throw new RangeError(`Not a day: ${day}`);
+  return Date.UTC(Number(year), Number(month) - 1, Number(date));
+}
+
+function yearUnlessThis(year: string, { zone, now }: Clock): string {
+  return year === partsOf(now, zone).year ? '' : ` ${year}`;
+}
