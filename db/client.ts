@@ -55,5 +55,5 @@ async function enter(tx: Tx, tenant: Tenant, keyOwner?: string): Promise<void> {
   // One round trip: role and settings end with the transaction.
   await tx.execute(sql`select set_config('role', ${ROLE[tenant.kind]}, true), set_config('app.shop_id', ${shopId}, true),
     set_config('app.processor_id', ${processorId}, true), set_config('app.batch_id', ${batchId}, true),
-    set_config('app.person_id', ${personId}, true)${keyOwner === undefined ? sql`` : sql`, set_config('app.key_owner', ${keyOwner}, true)`}`);
+    set_config('app.person_id', ${personId}, true), set_config('app.door', ${tenant.kind === 'door' ? 'open' : ''}, true)${keyOwner === undefined ? sql`` : sql`, set_config('app.key_owner', ${keyOwner}, true)`}`);
 }

@@ -44,7 +44,7 @@ const FAST_AND_UNSAFE = ['fsync=off', 'full_page_writes=off', 'synchronous_commi
 export async function openCluster({ folder, port, throwAway, report }: ClusterOptions): Promise<Cluster> {
   const place = await reachablePlace(folder, report);
   const ownerFile = `${place}.owner`;
-  const superUrl = clusterUrl(port, 'postgres', 'postgres');
+  const superUrl = `postgresql://postgres@127.0.0.1:${port}/postgres`;
 
   const running = runningServer(place);
   if (running && ownerIsAlive(ownerFile)) {
@@ -86,10 +86,6 @@ export async function openCluster({ folder, port, throwAway, report }: ClusterOp
       if (throwAway) rmSync(place, { recursive: true, force: true });
     },
   };
-}
-
-export function clusterUrl(port: number, role: string, database: string = DATABASE): string {
-  return `postgresql://${role}@127.0.0.1:${port}/${database}`;
 }
 
 /** A database of its own name in a running cluster, owned as the real one is. */

@@ -14,3 +14,6 @@ create function current_person() returns uuid language sql stable parallel safe
 --> statement-breakpoint
 create function current_key_owner() returns text language sql stable parallel safe
   as $$ select nullif(current_setting('app.key_owner', true), '') $$;
+--> statement-breakpoint
+create function at_the_door() returns boolean language sql stable parallel safe
+  as $$ select coalesce(current_setting('app.door', true), '') = 'open' $$;

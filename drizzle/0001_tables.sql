@@ -916,10 +916,10 @@ CREATE POLICY "portal_reads_batch" ON "batch_documents" AS PERMISSIVE FOR SELECT
 CREATE POLICY "own_shop_only" ON "batch_lines" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "portal_reads_batch" ON "batch_lines" AS PERMISSIVE FOR SELECT TO "app_portal" USING (batch_id in (select id from batches));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "batch_links" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
-CREATE POLICY "door" ON "batch_links" AS PERMISSIVE FOR ALL TO "app_door" USING (true) WITH CHECK (true);--> statement-breakpoint
+CREATE POLICY "door" ON "batch_links" AS PERMISSIVE FOR ALL TO "app_door" USING ((select at_the_door())) WITH CHECK ((select at_the_door()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "batches" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "portal_reads_dispatched" ON "batches" AS PERMISSIVE FOR SELECT TO "app_portal" USING (processor_id = (select current_processor()) and dispatched_at is not null and ((select current_batch()) is null or id = (select current_batch())));--> statement-breakpoint
-CREATE POLICY "door" ON "batches" AS PERMISSIVE FOR SELECT TO "app_door" USING (true);--> statement-breakpoint
+CREATE POLICY "door" ON "batches" AS PERMISSIVE FOR SELECT TO "app_door" USING ((select at_the_door()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "messages" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "portal_reads_batch" ON "messages" AS PERMISSIVE FOR SELECT TO "app_portal" USING (batch_id in (select id from batches));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "overrides" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
@@ -935,7 +935,7 @@ CREATE POLICY "own_shop_only" ON "coverage" AS PERMISSIVE FOR ALL TO "app_shop" 
 CREATE POLICY "own_shop_only" ON "decisions" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "dispositions" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "dossier_links" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
-CREATE POLICY "door" ON "dossier_links" AS PERMISSIVE FOR SELECT TO "app_door" USING (true);--> statement-breakpoint
+CREATE POLICY "door" ON "dossier_links" AS PERMISSIVE FOR SELECT TO "app_door" USING ((select at_the_door()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "dossiers" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "nonconformances" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "receipt_lines" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
@@ -955,40 +955,40 @@ CREATE POLICY "own_shop_only" ON "clearances" AS PERMISSIVE FOR ALL TO "app_shop
 CREATE POLICY "own_shop_only" ON "invoice_lines" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "invoices" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "portal_reads_batch" ON "invoices" AS PERMISSIVE FOR SELECT TO "app_portal" USING (batch_id in (select id from batches));--> statement-breakpoint
-CREATE POLICY "door" ON "invoices" AS PERMISSIVE FOR ALL TO "app_door" USING (true) WITH CHECK (true);--> statement-breakpoint
+CREATE POLICY "door" ON "invoices" AS PERMISSIVE FOR ALL TO "app_door" USING ((select at_the_door())) WITH CHECK ((select at_the_door()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "money_entries" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
-CREATE POLICY "door" ON "payment_events" AS PERMISSIVE FOR ALL TO "app_door" USING (true) WITH CHECK (true);--> statement-breakpoint
+CREATE POLICY "door" ON "payment_events" AS PERMISSIVE FOR ALL TO "app_door" USING ((select at_the_door())) WITH CHECK ((select at_the_door()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "payments" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
-CREATE POLICY "door" ON "payments" AS PERMISSIVE FOR ALL TO "app_door" USING (true) WITH CHECK (true);--> statement-breakpoint
+CREATE POLICY "door" ON "payments" AS PERMISSIVE FOR ALL TO "app_door" USING ((select at_the_door())) WITH CHECK ((select at_the_door()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "approvals" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "counters" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "shop_reads_its_processors" ON "processors" AS PERMISSIVE FOR SELECT TO "app_shop" USING (id in (select processor_id from shop_processors));--> statement-breakpoint
 CREATE POLICY "portal_reads_itself" ON "processors" AS PERMISSIVE FOR SELECT TO "app_portal" USING (id = (select current_processor()));--> statement-breakpoint
 CREATE POLICY "portal_changes_itself" ON "processors" AS PERMISSIVE FOR UPDATE TO "app_portal" USING (id = (select current_processor()) and (select current_batch()) is null);--> statement-breakpoint
-CREATE POLICY "door" ON "processors" AS PERMISSIVE FOR ALL TO "app_door" USING (true) WITH CHECK (true);--> statement-breakpoint
+CREATE POLICY "door" ON "processors" AS PERMISSIVE FOR ALL TO "app_door" USING ((select at_the_door())) WITH CHECK ((select at_the_door()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "shop_processors" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "portal_reads_own" ON "shop_processors" AS PERMISSIVE FOR SELECT TO "app_portal" USING (processor_id = (select current_processor()));--> statement-breakpoint
-CREATE POLICY "door" ON "shop_processors" AS PERMISSIVE FOR ALL TO "app_door" USING (true) WITH CHECK (true);--> statement-breakpoint
+CREATE POLICY "door" ON "shop_processors" AS PERMISSIVE FOR ALL TO "app_door" USING ((select at_the_door())) WITH CHECK ((select at_the_door()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "shops" AS PERMISSIVE FOR ALL TO "app_shop" USING (id = (select current_shop())) WITH CHECK (id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "portal_reads_customers" ON "shops" AS PERMISSIVE FOR SELECT TO "app_portal" USING (id in (select shop_id from batches));--> statement-breakpoint
-CREATE POLICY "door" ON "shops" AS PERMISSIVE FOR SELECT TO "app_door" USING (true);--> statement-breakpoint
+CREATE POLICY "door" ON "shops" AS PERMISSIVE FOR SELECT TO "app_door" USING ((select at_the_door()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "assemblies" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "assembly_needs" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "parts" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "route_steps" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "own_tokens_only" ON "api_tokens" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop()) and user_id = (select current_person())) WITH CHECK (shop_id = (select current_shop()) and user_id = (select current_person()));--> statement-breakpoint
-CREATE POLICY "door" ON "api_tokens" AS PERMISSIVE FOR ALL TO "app_door" USING (true) WITH CHECK (true);--> statement-breakpoint
+CREATE POLICY "door" ON "api_tokens" AS PERMISSIVE FOR ALL TO "app_door" USING ((select at_the_door())) WITH CHECK ((select at_the_door()));--> statement-breakpoint
 CREATE POLICY "own_keys_only" ON "idempotency_keys" AS PERMISSIVE FOR ALL TO "app_shop" USING (owner = (select current_key_owner())) WITH CHECK (owner = (select current_key_owner()));--> statement-breakpoint
 CREATE POLICY "own_keys_only_portal" ON "idempotency_keys" AS PERMISSIVE FOR ALL TO "app_portal" USING (owner = (select current_key_owner())) WITH CHECK (owner = (select current_key_owner()));--> statement-breakpoint
-CREATE POLICY "door" ON "idempotency_keys" AS PERMISSIVE FOR ALL TO "app_door" USING (true) WITH CHECK (true);--> statement-breakpoint
+CREATE POLICY "door" ON "idempotency_keys" AS PERMISSIVE FOR ALL TO "app_door" USING ((select at_the_door())) WITH CHECK ((select at_the_door()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "invitations" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
-CREATE POLICY "door" ON "invitations" AS PERMISSIVE FOR ALL TO "app_door" USING (true) WITH CHECK (true);--> statement-breakpoint
-CREATE POLICY "door" ON "mailed_links" AS PERMISSIVE FOR ALL TO "app_door" USING (true) WITH CHECK (true);--> statement-breakpoint
+CREATE POLICY "door" ON "invitations" AS PERMISSIVE FOR ALL TO "app_door" USING ((select at_the_door())) WITH CHECK ((select at_the_door()));--> statement-breakpoint
+CREATE POLICY "door" ON "mailed_links" AS PERMISSIVE FOR ALL TO "app_door" USING ((select at_the_door())) WITH CHECK ((select at_the_door()));--> statement-breakpoint
 CREATE POLICY "own_shop_only" ON "memberships" AS PERMISSIVE FOR ALL TO "app_shop" USING (shop_id = (select current_shop())) WITH CHECK (shop_id = (select current_shop()));--> statement-breakpoint
 CREATE POLICY "own_processor_only" ON "memberships" AS PERMISSIVE FOR SELECT TO "app_portal" USING (processor_id = (select current_processor()) and (select current_batch()) is null);--> statement-breakpoint
-CREATE POLICY "door" ON "memberships" AS PERMISSIVE FOR ALL TO "app_door" USING (true) WITH CHECK (true);--> statement-breakpoint
+CREATE POLICY "door" ON "memberships" AS PERMISSIVE FOR ALL TO "app_door" USING ((select at_the_door())) WITH CHECK ((select at_the_door()));--> statement-breakpoint
 CREATE POLICY "shop_reads_its_people" ON "users" AS PERMISSIVE FOR SELECT TO "app_shop" USING (id in (select user_id from memberships));--> statement-breakpoint
 CREATE POLICY "shop_person_changes_self" ON "users" AS PERMISSIVE FOR UPDATE TO "app_shop" USING (id = (select current_person()));--> statement-breakpoint
 CREATE POLICY "portal_reads_its_people" ON "users" AS PERMISSIVE FOR SELECT TO "app_portal" USING (id in (select user_id from memberships));--> statement-breakpoint
 CREATE POLICY "portal_person_changes_self" ON "users" AS PERMISSIVE FOR UPDATE TO "app_portal" USING (id = (select current_person()));--> statement-breakpoint
-CREATE POLICY "door" ON "users" AS PERMISSIVE FOR ALL TO "app_door" USING (true) WITH CHECK (true);
+CREATE POLICY "door" ON "users" AS PERMISSIVE FOR ALL TO "app_door" USING ((select at_the_door())) WITH CHECK ((select at_the_door()));

@@ -79,7 +79,7 @@ export const batches = pgTable(
       to: appPortal,
       using: sql`processor_id = (select current_processor()) and dispatched_at is not null and ((select current_batch()) is null or id = (select current_batch()))`,
     }),
-    pgPolicy('door', { for: 'select', to: appDoor, using: sql`true` }),
+    pgPolicy('door', { for: 'select', to: appDoor, using: sql`(select at_the_door())` }),
   ],
 );
 

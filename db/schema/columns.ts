@@ -38,5 +38,5 @@ export const ownShopOnly = () =>
 export const portalReadsBatch = () =>
   pgPolicy('portal_reads_batch', { for: 'select', to: appPortal, using: sql`batch_id in (select id from batches)` });
 
-/** Whole table readable and writable for finding out who somebody is; column grants narrow it. */
-export const doorOnly = () => pgPolicy('door', { for: 'all', to: appDoor, using: sql`true`, withCheck: sql`true` });
+/** Open while finding out who somebody is, and only then; column grants narrow what is to be seen. */
+export const doorOnly = () => pgPolicy('door', { for: 'all', to: appDoor, using: sql`(select at_the_door())`, withCheck: sql`(select at_the_door())` });

@@ -201,6 +201,8 @@ export const nonconformances = pgTable(
     lotId: uuid('lot_id').notNull(),
     kind: nonconformanceKind('kind').notNull(),
     pieces: integer('pieces').notNull(),
+    /** How many of these pieces a signed certificate already covered; a hold takes that proof away. */
+    coveredPieces: integer('covered_pieces').notNull().default(0),
     requirementId: uuid('requirement_id'),
     certificateId: uuid('certificate_id'),
     what: text('what').notNull(),
@@ -290,7 +292,7 @@ export const dossierLinks = pgTable(
     unique('dossier_links_token').on(t.tokenHash),
     foreignKey({ columns: [t.shopId, t.lotId], foreignColumns: [lots.shopId, lots.id] }),
     ownShopOnly(),
-    pgPolicy('door', { for: 'select', to: appDoor, using: sql`true` }),
+    pgPolicy('door', { for: 'select', to: appDoor, using: sql`(select at_the_door())` }),
   ],
 );
 

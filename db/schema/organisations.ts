@@ -30,7 +30,7 @@ export const shops = pgTable(
   () => [
     pgPolicy('own_shop_only', { for: 'all', to: appShop, using: sql`id = (select current_shop())`, withCheck: sql`id = (select current_shop())` }),
     pgPolicy('portal_reads_customers', { for: 'select', to: appPortal, using: sql`id in (select shop_id from batches)` }),
-    pgPolicy('door', { for: 'select', to: appDoor, using: sql`true` }),
+    pgPolicy('door', { for: 'select', to: appDoor, using: sql`(select at_the_door())` }),
   ],
 );
 
@@ -53,7 +53,7 @@ export const processors = pgTable(
     pgPolicy('shop_reads_its_processors', { for: 'select', to: appShop, using: sql`id in (select processor_id from shop_processors)` }),
     pgPolicy('portal_reads_itself', { for: 'select', to: appPortal, using: sql`id = (select current_processor())` }),
     pgPolicy('portal_changes_itself', { for: 'update', to: appPortal, using: sql`id = (select current_processor()) and (select current_batch()) is null` }),
-    pgPolicy('door', { for: 'all', to: appDoor, using: sql`true`, withCheck: sql`true` }),
+    pgPolicy('door', { for: 'all', to: appDoor, using: sql`(select at_the_door())`, withCheck: sql`(select at_the_door())` }),
   ],
 );
 
@@ -73,7 +73,7 @@ export const shopProcessors = pgTable(
     primaryKey({ columns: [t.shopId, t.processorId] }),
     ownShopOnly(),
     pgPolicy('portal_reads_own', { for: 'select', to: appPortal, using: sql`processor_id = (select current_processor())` }),
-    pgPolicy('door', { for: 'all', to: appDoor, using: sql`true`, withCheck: sql`true` }),
+    pgPolicy('door', { for: 'all', to: appDoor, using: sql`(select at_the_door())`, withCheck: sql`(select at_the_door())` }),
   ],
 );
 

@@ -1,8 +1,8 @@
 import { randomBytes } from 'node:crypto';
 import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { CannotStart } from '@/db/cannot-start';
-import { clusterUrl } from '@/db/cluster';
+// By path: the test runner reads this file before it knows the alias.
+import { CannotStart } from '../../db/cannot-start';
 
 export type StackKind = 'local' | 'test';
 type Given = Readonly<Record<string, string | undefined>>;
@@ -99,8 +99,8 @@ function localServices(
 ): Record<string, string> {
   return {
     ...(runsHere.database && {
-      DATABASE_URL: clusterUrl(ports.database, 'lotwright_app'),
-      DATABASE_OWNER_URL: clusterUrl(ports.database, 'lotwright_owner'),
+      DATABASE_URL: databaseUrl(ports.database, 'lotwright_app'),
+      DATABASE_OWNER_URL: databaseUrl(ports.database, 'lotwright_owner'),
     }),
     ...(runsHere.mail && { SMTP_URL: `smtp://127.0.0.1:${ports.smtp}` }),
     ...(runsHere.storage && {
@@ -115,6 +115,8 @@ function localServices(
     }),
   };
 }
+
+const databaseUrl = (port: number, role: string) => `postgresql://${role}@127.0.0.1:${port}/lotwright`;
 
 function withoutServices(environment: Given): Given {
   return Object.fromEntries(Object.entries(environment).filter(([name]) => !SERVICE_NAMES.includes(name)));

@@ -1,0 +1,118 @@
+import { createHash } from 'node:crypto';
+
+import { primary, replica } from '@/db/pools';
+import { withTenant, type Tx } from '@/db/client';
+import type { Endpoint } from '@/lib/api/endpoint';
+import { authorize } from '@/lib/auth/authorize';
+import { personOf, type Ctx } from '@/lib/auth/context';
+import type { Identity } from '@/lib/auth/identify';
+import { env } from '@/lib/env';
+import { AppError } from '@/lib/errors';
+import { newId } from '@/lib/ids';
+import { log } from '@/lib/log';
+
+import { once } from './idempotency';
+import { problemResponse } from './problem';
+import { identify } from './session';
+
+const LARGEST_BODY = 1_000_000;
+
+type RouteHandler = (request: Request, route: { params: Promise<Record<string, string>> }) => Promise<Response>;
+
+/**
+ * Turns an endpoint into a route: who, may they, is the input right, in whose rows, done once, told in one form.
+ * The only door of the browser and of programs.
+ */
+export function serve(endpoint: Endpoint): RouteHandler {
+  return async (request, route) => {
+    const requestId = request.headers.get('x-request-id')?.slice(0, 64) ?? newId();
+    const startedAt = performance.now();
+    try {
+      const response = await answer(endpoint, request, await route.params, requestId);
+      log.info({ requestId, operation: endpoint.declaration.id, status: response.status, ms: Math.round(performance.now() - startedAt) }, 'answered');
+      return response;
+    } catch (error) {
+      const response = problemResponse(error, requestId);
+      log.info({ requestId, operation: endpoint.declaration.id, status: response.status, ms: Math.round(performance.now() - startedAt) }, 'refused');
+      return response;
+    }
+  };
+}
+
+async function answer(endpoint: Endpoint, request: Request, params: Record<string, string>, requestId: string): Promise<Response> {
+  const { declaration } = endpoint;
+  const now = new Date();
+  const isRead = declaration.method === 'get';
+  if (!isRead) refuseForeignOrigin(request);
+  const identity = atItsSide(await identify(request.headers, now), endpoint);
+  standBefore(identity, endpoint);
+
+  const body = isRead ? queryOf(request) : await bodyOf(request);
+  const input: Record<string, unknown> = declaration.input.parse({ ...body, ...params });
+  const address = request.headers.get('x-forwarded-for')?.split(',')[0]?.trim() ?? null;
+  const key = isRead ? null : request.headers.get('idempotency-key');
+
+  const work = async (tx: Tx): Promise<unknown> => {
+    const ctx: Ctx = { tenant: identity.tenant, actor: identity.actor, tx, now, requestId, address };
+    const result = await endpoint.run(ctx, input);
+    return result instanceof Response ? result : declaration.response.parse(result);
+  };
+  const owner = keyOwnerOf(identity);
+  const result = await withTenant(
+    isRead ? replica() : primary(),
+    identity.tenant,
+    (tx) => (key === null ? work(tx) : once(tx, { owner, key, operation: declaration.id, requestHash: hashOf(input), now }, () => work(tx))),
+    owner,
+  );
+  if (result instanceof Response) return result;
+  return Response.json(result, { headers: { 'x-request-id': requestId, 'cache-control': 'no-store' } });
+}
+
+/** What is for everyone is done at the door, whoever comes: a signed-in person may open a link that was sent to another. */
+const atItsSide = (identity: Identity, { declaration }: Endpoint): Identity => (declaration.side === 'public' ? { ...identity, tenant: { kind: 'door' } } : identity);
+
+/** The permission first, then the side: a processor at a shop's door is told the same as any stranger. */
+function standBefore(identity: Identity, { declaration }: Endpoint): void {
+  authorize(identity, declaration.permission);
+  const side = identity.tenant.kind;
+  const fits = declaration.side === 'public' || (declaration.side === 'any' && side !== 'door') || (declaration.side === 'shop' && side === 'shop') || (declaration.side === 'portal' && side === 'processor');
+  if (!fits) throw new AppError('not_allowed', 'This belongs to another side of Lotwright.');
+}
+
+/** Cookies come along with a form on a foreign page; its Origin does not lie. Programs with a token send none. */
+function refuseForeignOrigin(request: Request): void {
+  const origin = request.headers.get('origin');
+  if (origin !== null && origin !== new URL(env.APP_URL).origin) throw new AppError('not_allowed', 'This came from a page that is not Lotwright.');
+}
+
+function queryOf(request: Request): Record<string, unknown> {
+  const query: Record<string, unknown> = {};
+  const search = new URL(request.url).searchParams;
+  for (const name of new Set(search.keys())) {
+    const values = search.getAll(name);
+    query[name] = values.length > 1 ? values : values[0];
+  }
+  return query;
+}
+
+async function bodyOf(request: Request): Promise<Record<string, unknown>> {
+  const text = await request.text();
+  if (text.length > LARGEST_BODY) throw new AppError('too_large', 'This is more than one request may carry.');
+  if (text === '') return {};
+  try {
+    const body: unknown = JSON.parse(text);
+    if (body !== null && typeof body === 'object' && !Array.isArray(body)) return body as Record<string, unknown>;
+  } catch {
+    // Told below, in the same words as any body of the wrong shape.
+  }
+  throw new AppError('bad_input', 'The body must be one JSON object.');
+}
+
+/** Whose idempotency keys: a person's in one organisation, a link's, or (door) nobody's in common. */
+function keyOwnerOf({ actor, tenant }: Identity): string {
+  const who = actor.kind === 'link' ? actor.linkId : personOf(actor);
+  if (who === null) return '';
+  return tenant.kind === 'shop' ? `${tenant.shopId}:${who}` : `${tenant.kind}:${who}`;
+}
+
+const hashOf = (input: unknown): string => createHash('sha256').update(JSON.stringify(input)).digest('hex');

@@ -1,0 +1,50 @@
+'use client';
+import { useInfiniteQuery, useMutation, useQuery, useQueryClient, useSuspenseQuery, type UseMutationResult } from '@tanstack/react-query';
+import { useRef } from 'react';
+
+import { ApiError, call } from '@/lib/api/client';
+import type { Declaration, InputOf, OutputOf } from '@/lib/api/endpoint';
+import { queryKeyOf } from '@/lib/api/query-key';
+
+const optionsOf = <D extends Declaration>(declaration: D, input: InputOf<D>) => ({
+  queryKey: queryKeyOf(declaration, input as Record<string, unknown>),
+  queryFn: ({ signal }: { signal: AbortSignal }) => call(declaration, input, { signal }),
+});
+
+/** A read that the page prefetched; keeps itself fresh. */
+export function useRead<D extends Declaration>(declaration: D, input: InputOf<D>) {
+  return useSuspenseQuery<OutputOf<D>>(optionsOf(declaration, input));
+}
+
+/** A read that starts in the browser: search as one types, a detail that opens. */
+export function useLazyRead<D extends Declaration>(declaration: D, input: InputOf<D>, options: { enabled?: boolean; refreshEveryMs?: number } = {}) {
+  return useQuery<OutputOf<D>>({ ...optionsOf(declaration, input), enabled: options.enabled ?? true, refetchInterval: options.refreshEveryMs ?? false });
+}
+
+/** A list that loads further pages by key. The first page is the prefetched one. */
+export function usePages<D extends Declaration>(declaration: D, input: InputOf<D>) {
+  return useInfiniteQuery({
+    queryKey: [...queryKeyOf(declaration, input as Record<string, unknown>), 'pages'],
+    queryFn: ({ pageParam, signal }) => call(declaration, { ...(input as object), ...(pageParam === null ? {} : { after: pageParam }) } as InputOf<D>, { signal }) as Promise<OutputOf<D> & { next: string | null }>,
+    initialPageParam: null as string | null,
+    getNextPageParam: (page: { next: string | null }) => page.next,
+  });
+}
+
+/**
+ * A write. Afterwards the named reads are fetched again. The same press keeps its key when it is tried again after a
+ * lost answer; a new press gets a new one.
+ */
+export function useWrite<D extends Declaration>(declaration: D, options: { refreshes?: readonly Declaration[] } = {}): UseMutationResult<OutputOf<D>, ApiError, InputOf<D>> {
+  const cache = useQueryClient();
+  const key = useRef('');
+  return useMutation<OutputOf<D>, ApiError, InputOf<D>>({
+    onMutate: () => {
+      key.current = crypto.randomUUID();
+    },
+    mutationFn: (input) => call(declaration, input, { key: key.current }),
+    retry: (count, error) => count < 3 && error instanceof ApiError && [0, 503].includes(error.problem.status),
+    retryDelay: (count) => 400 * 2 ** count,
+    onSuccess: () => Promise.all((options.refreshes ?? []).map((read) => cache.invalidateQueries({ queryKey: [read.id] }))),
+  });
+}

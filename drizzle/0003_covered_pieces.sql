@@ -1,0 +1,1 @@
+ALTER TABLE "nonconformances" ADD COLUMN "covered_pieces" integer DEFAULT 0 NOT NULL;

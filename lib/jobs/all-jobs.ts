@@ -1,0 +1,4 @@
+import type { Job } from './job';
+
+/** What the worker runs: one job for each queue of `queues.ts`; a test compares the two. */
+export const ALL_JOBS: readonly Job[] = [];

@@ -1,0 +1,64 @@
+import { createServer } from 'node:http';
+import PgBoss from 'pg-boss';
+
+import { connect, withTenant, type Db } from '@/db/client';
+import { env } from '@/lib/env';
+import { newId } from '@/lib/ids';
+import { log } from '@/lib/log';
+
+import { ALL_JOBS } from './all-jobs';
+import type { Job, JobTools } from './job';
+import { QUEUES } from './queues';
+
+/** The worker process: runs queued jobs until it is told to stop, then finishes the ones in hand. */
+async function main(): Promise<void> {
+  const { db, pool } = connect(env.DATABASE_URL, 10);
+  const boss = new PgBoss({ connectionString: env.DATABASE_URL, schema: 'pgboss', migrate: false, max: 6, archiveFailedAfterSeconds: 90 * 24 * 3600 });
+  boss.on('error', (error) => log.error({ error }, 'queue'));
+  await boss.start();
+  for (const job of ALL_JOBS) await listen(boss, db, job);
+
+  const health = createServer((_, response) => response.end('ok')).listen(env.WORKER_PORT, '127.0.0.1');
+  let stopping = false;
+  const stop = async () => {
+    if (stopping) return;
+    stopping = true;
+    health.close();
+    await boss.stop({ graceful: true, timeout: 6000, close: true });
+    await pool.end();
+    process.exit(0);
+  };
+  process.on('SIGTERM', () => void stop());
+  process.on('SIGINT', () => void stop());
+  log.info({ jobs: ALL_JOBS.map((job) => job.name) }, 'worker ready');
+}
+
+async function listen(boss: PgBoss, db: Db, job: Job): Promise<void> {
+  for (let lane = 0; lane < job.concurrency; lane++) {
+    await boss.work<unknown>(job.name, { pollingIntervalSeconds: 0.5, batchSize: 1, includeMetadata: true }, async (taken) => {
+      for (const one of taken) await runJob(db, job, one.data, one.retryCount + 1, one.id);
+    });
+  }
+}
+
+/** Runs one job as the worker does; tests call it through `runJobs`. */
+export async function runJob(db: Db, job: Job, data: unknown, attempt: number, jobId: string): Promise<void> {
+  const tools: JobTools = {
+    attempt,
+    now: () => new Date(),
+    inShop: (shopId, work) =>
+      withTenant(db, { kind: 'shop', shopId, personId: null }, (tx) =>
+        work({ tenant: { kind: 'shop', shopId, personId: null }, actor: { kind: 'job', name: job.name, roles: [] }, tx, now: new Date(), requestId: jobId || newId(), address: null }),
+      ),
+  };
+  try {
+    await job.run(tools, job.payload.parse(data));
+    log.info({ job: job.name, jobId, attempt }, 'done');
+  } catch (error) {
+    const last = attempt > (QUEUES.find((queue) => queue.name === job.name)?.retries ?? 0);
+    log.warn({ job: job.name, jobId, attempt, error }, last ? 'given up' : 'to be tried again');
+    throw error;
+  }
+}
+
+if (process.argv[1] === import.meta.filename) await main();
