@@ -1,4 +1,4 @@
-import Stripe from 'stripe';
+import type Stripe from 'stripe';
 import { env } from '@/lib/env';
 import { AppError } from '@/lib/errors';
 import { ownStripe } from '@/lib/payments/stripe-client';

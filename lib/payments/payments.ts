@@ -143,7 +143,8 @@ export async function refundPayment(
 async function attempt(work: () => Promise<Stripe.PaymentIntent>): Promise<PaymentAttempt> {
   try {
     const intent = await reaching(work);
-    if (intent.status === 'succeeded' || intent.status === 'processing') return { state: intent.status, intentId: intent.id };
+    if (intent.status === 'succeeded') return { state: 'succeeded', intentId: intent.id };
+    if (intent.status === 'processing') return { state: 'processing', intentId: intent.id };
     return { state: 'declined', intentId: intent.id, reason: intent.last_payment_error?.message ?? 'The payment was not completed.' };
   } catch (error) {
     if (!(error instanceof Stripe.errors.StripeCardError) || error.payment_intent === undefined) throw error;
