@@ -1,8 +1,7 @@
 import { and, eq, sql } from 'drizzle-orm';
 import fc from 'fast-check';
-import { afterAll, beforeAll, expect, test } from 'vitest';
+import { expect, test } from 'vitest';
 
-import { connect, type Db } from '@/db/client';
 import { balances, movements } from '@/db/schema/lots';
 import { NO_HOLDER, newId } from '@/lib/ids';
 import { movePieces } from '@/lib/stock/move-pieces';
@@ -10,20 +9,9 @@ import { PLACES, type Place } from '@/lib/stock/places';
 
 import { makeLot } from '../factories/lots';
 import { makeWorld, type World } from '../factories/world';
-import { makeDatabase } from './database';
+import { openDatabase } from './open-database';
 
-let db: Db, owner: Db, drop: () => Promise<void>;
-beforeAll(async () => {
-  const database = await makeDatabase();
-  const app = connect(database.appUrl);
-  const own = connect(database.ownerUrl, 4);
-  [db, owner] = [app.db, own.db];
-  drop = async () => {
-    await Promise.all([app.pool.end(), own.pool.end()]);
-    await database.drop();
-  };
-});
-afterAll(() => drop());
+const base = openDatabase();
 
 const places: readonly Place[] = PLACES.filter((place) => place !== 'making');
 
@@ -49,7 +37,7 @@ async function bothLedgers(world: World, lotId: string) {
 }
 
 test('whatever is moved in whatever order, pieces made are pieces in all places, and no balance is below nothing', async () => {
-  const world = await makeWorld(db, owner);
+  const world = await makeWorld(base.db, base.owner);
   const holders = [NO_HOLDER, newId(), newId()];
   const move = fc.record({ from: fc.constantFrom(...PLACES), to: fc.constantFrom(...places), fromHolder: fc.constantFrom(...holders), toHolder: fc.constantFrom(...holders), pieces: fc.integer({ min: 1, max: 8 }) });
   await fc.assert(
@@ -72,7 +60,7 @@ test('whatever is moved in whatever order, pieces made are pieces in all places,
 });
 
 test('twenty takers at once on real connections share ten pieces, none twice', async () => {
-  const world = await makeWorld(db, owner);
+  const world = await makeWorld(base.db, base.owner);
   const lot = await world.as(['lead'], (ctx) => makeLot(ctx, { pieces: 10 }));
   const line = newId();
   const outcomes = await Promise.allSettled(
@@ -85,7 +73,7 @@ test('twenty takers at once on real connections share ten pieces, none twice', a
 });
 
 test('a named piece is in one place, and cannot be moved from where it is not', async () => {
-  const world = await makeWorld(db, owner);
+  const world = await makeWorld(base.db, base.owner);
   const lot = await world.as(['lead'], (ctx) => makeLot(ctx, { serials: ['S-1', 'S-2', 'S-3'] }));
   const line = newId();
   const pack = (pieces: number) => world.as(['lead'], (ctx) => movePieces(ctx, { lotId: lot.id, pieces, from: { place: 'making', holderId: lot.stepId }, to: { place: 'packed', holderId: line }, reason: 'packed' }));
@@ -98,9 +86,9 @@ test('a named piece is in one place, and cannot be moved from where it is not', 
 });
 
 test('the application can neither change a movement nor write a balance', async () => {
-  const world = await makeWorld(db, owner);
+  const world = await makeWorld(base.db, base.owner);
   const lot = await world.as(['lead'], (ctx) => makeLot(ctx));
   await expect(world.as(['admin'], ({ tx }) => tx.update(movements).set({ pieces: 99 }).where(eq(movements.lotId, lot.id)))).rejects.toThrow();
   await expect(world.as(['admin'], ({ tx }) => tx.update(balances).set({ pieces: 99 }).where(eq(balances.lotId, lot.id)))).rejects.toThrow();
-  await expect(owner.update(movements).set({ pieces: 99 }).where(eq(movements.lotId, lot.id))).rejects.toThrow();
+  await expect(base.owner.update(movements).set({ pieces: 99 }).where(eq(movements.lotId, lot.id))).rejects.toThrow();
 });
