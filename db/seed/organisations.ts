@@ -1,0 +1,95 @@
+import { hash } from '@node-rs/argon2';
+import { drizzle } from 'drizzle-orm/node-postgres';
+
+import { processors, shopProcessors, shops, approvals } from '@/db/schema/organisations';
+import { memberships, users } from '@/db/schema/people';
+import type { Role } from '@/lib/auth/roles';
+import { newId } from '@/lib/ids';
+import type { Process } from '@/lib/parts/process';
+
+import { DEMO_PASSWORD } from './sign-ins';
+
+type OwnerDb = ReturnType<typeof drizzle>;
+
+export interface DemoPerson {
+  id: string;
+  name: string;
+  roles: readonly Role[];
+}
+
+export interface DemoProcessor {
+  id: string;
+  name: string;
+  contact: string;
+  processes: readonly Process[];
+}
+
+export interface DemoOrganisations {
+  shopId: string;
+  otherShopId: string;
+  people: Record<'lead' | 'lead2' | 'inspector' | 'inspector2' | 'office' | 'admin' | 'auditor' | 'foreman', DemoPerson>;
+  otherOwner: DemoPerson;
+  processors: Record<'thermal' | 'plating' | 'inspection' | 'peening', DemoProcessor>;
+}
+
+const HEAT: readonly Process[] = ['solution_heat_treat_and_age', 'solution_heat_treat', 'artificial_age', 'anneal', 'harden_and_temper', 'stress_relief', 'embrittlement_relief'];
+const FINISH: readonly Process[] = ['cadmium_plate', 'zinc_plate', 'anodize', 'chemical_film', 'passivation', 'embrittlement_relief'];
+const NDT: readonly Process[] = ['fluorescent_penetrant', 'magnetic_particle', 'radiography', 'ultrasonic'];
+
+/** Two yards, four processors that both know, and their people. All invented. */
+export async function seedOrganisations(owner: OwnerDb, { since, today }: { since: Date; today: Date }): Promise<DemoOrganisations> {
+  const passwordHash = await hash(DEMO_PASSWORD);
+  const [shopId, otherShopId] = [newId(), newId()];
+  await owner.insert(shops).values([
+    { id: shopId, name: 'Merganser Cove Aircraft', address: ['Slip 9, Merganser Cove', 'Port Alder'], phone: '555 0190', zone: 'America/Vancouver', currency: 'USD', orderPrefix: 'MC', secondApprovalAboveMinor: 50_000, createdAt: since },
+    { id: otherShopId, name: 'Larkspur Sheet Metal', address: ['2 Kiln Yard', 'Harrow Ferry'], phone: '555 0147', zone: 'America/Chicago', currency: 'USD', orderPrefix: 'LS', createdAt: since },
+  ]);
+
+  const person = async (name: string, email: string, roles: readonly Role[], organisation: { shopId: string } | { processorId: string }): Promise<DemoPerson> => {
+    const id = newId();
+    await owner.insert(users).values({ id, name, email, passwordHash, createdAt: since });
+    await owner.insert(memberships).values({ userId: id, roles: [...roles], ...organisation, createdAt: since });
+    return { id, name, roles };
+  };
+  const inShop = (name: string, email: string, roles: readonly Role[]) => person(name, `${email}@merganser.test`, roles, { shopId });
+
+  const people = {
+    lead: await inShop('Liv Sandvik', 'liv', ['lead']),
+    lead2: await inShop('Bertrand Achterberg-Mwangi', 'bertrand', ['lead']),
+    inspector: await inShop('Amos Teller', 'amos', ['inspector']),
+    inspector2: await inShop('Ottilie Brandt', 'ottilie', ['inspector', 'lead']),
+    office: await inShop('Petra Lindqvist', 'petra', ['office']),
+    admin: await inShop('Jun Okabe', 'jun', ['admin']),
+    auditor: await inShop('Ada Fennimore', 'ada', ['auditor']),
+    foreman: await inShop('Silas Quarrington', 'silas', ['lead', 'inspector', 'office']),
+  };
+  const otherOwner = await person('Corin Vale', 'owner@larkspur.test', ['lead', 'inspector', 'office', 'admin'], { shopId: otherShopId });
+
+  const processor = async (name: string, domain: string, contact: string, processes: readonly Process[], validDays: number): Promise<DemoProcessor> => {
+    const id = newId();
+    const email = `desk@${domain}`;
+    await owner.insert(processors).values({ id, name, email, phone: '555 0112', address: ['Works Road', 'Tamarack Junction'], zone: 'America/Vancouver', createdAt: since });
+    await person(contact, email, ['processor'], { processorId: id });
+    for (const [shop, reference] of [[shopId, 'Q-114'], [otherShopId, 'AP-7']] as const) {
+      await owner.insert(shopProcessors).values({ shopId: shop, processorId: id, contactName: contact, contactEmail: email, createdAt: since });
+      await owner.insert(approvals).values({ shopId: shop, processorId: id, reference: `${reference}-${id.slice(-3)}`, processes: [...processes], validFrom: dayOf(since), validTo: dayOf(addDays(today, validDays)), createdAt: since });
+    }
+    return { id, name, contact, processes };
+  };
+
+  return {
+    shopId,
+    otherShopId,
+    people,
+    otherOwner,
+    processors: {
+      thermal: await processor('Galena Thermal', 'galena-thermal.test', 'Runa Holt', HEAT, 21),
+      plating: await processor('Sallow & Finch Plating', 'sallowfinch.test', 'Imre Vasko', FINISH, 240),
+      inspection: await processor('Dunlin Inspection', 'dunlin.test', 'Thea Marsh', NDT, 320),
+      peening: await processor('Cobble Street Peening and Surface Works', 'cobblestreet.test', 'Joaquim Ferro', ['shot_peen', 'phosphate'], 400),
+    },
+  };
+}
+
+export const addDays = (date: Date, days: number): Date => new Date(date.getTime() + days * 24 * 3600 * 1000);
+export const dayOf = (date: Date): string => date.toISOString().slice(0, 10);
