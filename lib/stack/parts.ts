@@ -21,7 +21,7 @@ const typescript = (script: string) => ['--import', 'tsx', script];
 const NEXT = join('node_modules', 'next', 'dist', 'bin', 'next');
 
 /** The services of others that nobody named an address for. */
-export function standIns({ ports, dataFolder, runsHere, env }: StackSettings): Part[] {
+export function standIns({ ports, dataFolder, runsHere }: StackSettings): Part[] {
   const mail: Part = {
     name: 'mail',
     args: typescript('fakes/mail/server.ts'),
@@ -49,8 +49,7 @@ export function standIns({ ports, dataFolder, runsHere, env }: StackSettings): P
     args: typescript('fakes/payments/server.ts'),
     env: {
       FAKE_PAYMENTS_PORT: String(ports.payments),
-      FAKE_PAYMENTS_DIR: join(dataFolder, 'payments'),
-      FAKE_PAYMENTS_WEBHOOK_URL: `${env['APP_URL'] ?? ''}/api/payments/webhook`,
+      FAKE_PAYMENTS_FILE: join(dataFolder, 'payments.json'),
     },
     health: `http://127.0.0.1:${ports.payments}/health`,
     ports: [ports.payments],

@@ -101,7 +101,7 @@ function waitUntilUp(
   });
 }
 
-async function answers(url: string): Promise<boolean> {
+export async function answers(url: string): Promise<boolean> {
   try {
     // A development server compiles on the first request, which takes longer than any later one.
     const response = await fetch(url, { signal: AbortSignal.timeout(60_000) });

@@ -1,4 +1,4 @@
-import { existsSync } from 'node:fs';
+import { existsSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
 import { CannotStart } from '@/db/cannot-start';
 import { type Cluster, openCluster } from '@/db/cluster';
@@ -7,7 +7,7 @@ import { loadDemoData, resetDatabase } from './demo-data';
 import { type Part, standIns, type WebMode, webPart, workerPart } from './parts';
 import { prepareDatabase } from './prepare-database';
 import { claimRun } from './run-record';
-import { demandFreePorts, lastLines, type RunningPart, startPart } from './running-part';
+import { answers, demandFreePorts, lastLines, type RunningPart, startPart } from './running-part';
 import { type StackSettings } from './settings';
 
 export interface StackOptions {
@@ -57,8 +57,18 @@ export class Stack {
     await prepareDatabase(ownerUrl);
   }
 
-  async startStandIns(): Promise<void> {
-    await Promise.all(standIns(this.#options.settings).map((part) => this.#start(part, STAND_IN_MS)));
+  async startStandIns({ reset }: { reset: boolean }): Promise<void> {
+    const { settings, report } = this.#options;
+    const parts = standIns(settings);
+    if (settings.kind === 'test' && parts.length > 0 && (await allAnswer(parts))) {
+      return report('The stand-ins for tests are already running; using them.');
+    }
+    if (reset) {
+      for (const name of ['mail', 'storage', 'payments.json']) {
+        rmSync(join(settings.dataFolder, name), { recursive: true, force: true });
+      }
+    }
+    await Promise.all(parts.map((part) => this.#start(part, STAND_IN_MS)));
   }
 
   /** Into a database of our own only: its well-known passwords have no business in anybody else's. */
@@ -122,4 +132,9 @@ export class Stack {
   #ownerUrl(): string {
     return process.env['DATABASE_OWNER_URL'] ?? '';
   }
+}
+
+async function allAnswer(parts: readonly Part[]): Promise<boolean> {
+  const up = await Promise.all(parts.map((part) => answers(part.health)));
+  return up.every(Boolean);
 }

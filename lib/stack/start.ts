@@ -48,8 +48,9 @@ async function main(): Promise<void> {
 
 async function bringUp(stack: Stack): Promise<void> {
   await stack.claim();
-  await stack.openDatabase({ reset: process.argv.includes('--reset') });
-  await stack.startStandIns();
+  const reset = process.argv.includes('--reset');
+  await stack.openDatabase({ reset });
+  await stack.startStandIns({ reset });
   await Promise.all([stack.loadDemo(), isDev ? Promise.resolve() : stack.build()]);
   report(isDev ? 'Starting the development server …' : 'Starting …');
   await stack.startProduct(isDev ? 'dev' : 'built');

@@ -4,7 +4,7 @@ import type { TestProject } from 'vitest/node';
 import { type Cluster, createDatabase, dropDatabase, openCluster } from '@/db/cluster';
 import { standIns } from '@/lib/stack/parts';
 import { prepareDatabase } from '@/lib/stack/prepare-database';
-import { type RunningPart, startPart } from '@/lib/stack/running-part';
+import { answers, type RunningPart, startPart } from '@/lib/stack/running-part';
 import { stackSettings } from '@/lib/stack/settings';
 
 declare module 'vitest' {
@@ -35,7 +35,7 @@ export default async function setUp(project: TestProject): Promise<() => Promise
 
   const started: RunningPart[] = [];
   for (const part of standIns(settings)) {
-    if (await isAnswering(part.health)) continue;
+    if (await answers(part.health)) continue;
     const running = startPart(part, {
       env: settings.env,
       logFile: join(settings.dataFolder, 'logs', `${part.name}.log`),
@@ -66,12 +66,4 @@ async function disconnectEverybody(superUrl: string, database: string): Promise<
   await client.connect();
   await client.query('select pg_terminate_backend(pid) from pg_stat_activity where datname = $1', [database]);
   await client.end();
-}
-
-async function isAnswering(url: string): Promise<boolean> {
-  try {
-    return (await fetch(url)).ok;
-  } catch {
-    return false;
-  }
 }

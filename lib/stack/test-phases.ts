@@ -1,0 +1,104 @@
+import { type ChildProcess, spawn } from 'node:child_process';
+import { existsSync, mkdirSync, rmSync } from 'node:fs';
+import { join } from 'node:path';
+import { type Tally, tallyPlaywright, tallyVitest } from './tally';
+
+type Env = Readonly<Record<string, string>>;
+
+export interface Phase {
+  readonly name: string;
+  /** How much of the stack must stand before it can run. */
+  readonly needs: 'nothing' | 'database' | 'stack';
+  run(env: Env): Promise<Tally>;
+}
+
+const RESULTS = 'test-results';
+const bin = (...path: string[]) => join('node_modules', ...path);
+
+const NEXT = bin('next', 'dist', 'bin', 'next');
+const VITEST = bin('vitest', 'vitest.mjs');
+
+/** In the order in which they run: what is cheap and says most first. */
+export const PHASES: readonly Phase[] = [
+  {
+    name: 'types',
+    needs: 'nothing',
+    async run(env) {
+      // The types of the routes are generated; without them every page has an unknown `PageProps`.
+      const generated = await runNode([NEXT, 'typegen'], env);
+      return check(generated === 0 ? await runNode([bin('typescript', 'bin', 'tsc'), '--noEmit'], env) : generated);
+    },
+  },
+  {
+    name: 'lint',
+    needs: 'nothing',
+    run: async (env) => check(await runNode([bin('eslint', 'bin', 'eslint.js'), '.', '--max-warnings', '0'], env)),
+  },
+  {
+    name: 'boundaries',
+    needs: 'nothing',
+    async run(env) {
+      const folders = ['app', 'components', 'emails', 'lib', 'db', 'fakes'].filter((folder) => existsSync(folder));
+      const cruiser = bin('dependency-cruiser', 'bin', 'dependency-cruise.mjs');
+      return check(await runNode([cruiser, '--config', '.dependency-cruiser.cjs', ...folders], env));
+    },
+  },
+  { name: 'unused', needs: 'nothing', run: async (env) => check(await runNode([bin('knip', 'bin', 'knip.js')], env)) },
+  { name: 'unit', needs: 'nothing', run: (env) => runVitest('unit', env) },
+  { name: 'services', needs: 'database', run: (env) => runVitest('services', env) },
+  { name: 'e2e', needs: 'stack', run: runPlaywright },
+  { name: 'faults', needs: 'stack', run: (env) => runVitest('faults', env) },
+];
+
+async function runVitest(project: string, env: Env): Promise<Tally> {
+  const file = freshReport(project);
+  const reporters = ['--reporter=default', '--reporter=json', `--outputFile.json=${file}`];
+  const code = await runNode([VITEST, 'run', '--project', project, ...reporters], {
+    ...env,
+    VITE_CONFIG_NATIVE_IGNORE_WARNING: 'true',
+  });
+  return tallyVitest(file, code);
+}
+
+async function runPlaywright(env: Env): Promise<Tally> {
+  const file = freshReport('e2e');
+  const code = await runNode([bin('@playwright', 'test', 'cli.js'), 'test'], env);
+  return tallyPlaywright(file, code);
+}
+
+/** A report left over from an earlier run must not be counted for this one. */
+function freshReport(name: string): string {
+  mkdirSync(RESULTS, { recursive: true });
+  const file = join(RESULTS, `${name}.json`);
+  rmSync(file, { force: true });
+  return file;
+}
+
+const check = (exitCode: number): Tally => (exitCode === 0 ? { passed: 1, failed: 0 } : { passed: 0, failed: 1 });
+
+let current: ChildProcess | undefined;
+
+export function endCurrentPhase(): void {
+  if (current?.pid === undefined) return;
+  try {
+    process.kill(-current.pid, 'SIGTERM');
+  } catch {
+    // It ended by itself in the meantime.
+  }
+}
+
+function runNode(args: readonly string[], env: Env): Promise<number> {
+  return new Promise((resolve) => {
+    const child = spawn(process.execPath, args, {
+      env: { ...process.env, ...env },
+      stdio: ['ignore', 'inherit', 'inherit'],
+      detached: true,
+    });
+    current = child;
+    child.once('error', () => resolve(1));
+    child.once('close', (code) => {
+      current = undefined;
+      resolve(code ?? 1);
+    });
+  });
+}
