@@ -10,8 +10,6 @@ const isDev = process.argv.includes('--dev');
 let isEnding = false;
 const report = (line: string) => console.log(line);
 
-await main();
-
 async function main(): Promise<void> {
   // What is already in the environment wins over the file.
   if (existsSync('.env')) process.loadEnvFile('.env');
@@ -115,3 +113,5 @@ function aligned(rows: readonly (readonly string[])[]): string {
   const widths = (rows[0] ?? []).map((_, column) => Math.max(...rows.map((row) => row[column]?.length ?? 0)));
   return rows.map((row) => `  ${row.map((cell, column) => cell.padEnd(widths[column] ?? 0)).join('  ')}`.trimEnd()).join('\n');
 }
+
+await main();

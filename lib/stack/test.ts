@@ -10,8 +10,6 @@ const report = (line: string) => console.log(line);
 /** Named ones only, or all of them: `npm test -- unit services`. */
 const wanted = process.argv.slice(2);
 
-await main();
-
 async function main(): Promise<void> {
   const unknown = wanted.filter((name) => !PHASES.some((phase) => phase.name === name));
   if (unknown.length > 0) {
@@ -112,3 +110,5 @@ function endOnSignals(stack: Stack): void {
 }
 
 const seconds = (since: number) => Math.round((Date.now() - since) / 1000);
+
+await main();
