@@ -1,0 +1,3 @@
+export default function TidelinePage() {
+  return <h1>Tideline</h1>;
+}

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { getMeEndpoint } from '@/lib/session/endpoints';
+
+export const GET = serve(getMeEndpoint);
