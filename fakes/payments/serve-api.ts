@@ -23,7 +23,7 @@ export async function serveApi(world: PaymentsWorld, request: IncomingMessage, r
   const body = await readBody(request);
   // From here to the answer nothing is awaited: requests are handled one after the other, whole.
   const answer = answerOf(world, { request, body, requestId });
-  if (request.method === 'POST' && world.losesAnswer()) return void request.destroy();
+  if (request.method === 'POST' && world.losesAnswer()) return void request.socket.destroy();
 
   const key = headerOf(request, 'idempotency-key');
   answerWith(response, {

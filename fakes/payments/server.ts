@@ -70,7 +70,7 @@ async function serve(world: PaymentsWorld, request: IncomingMessage, response: S
   if (section === '') return answerHtml(response, overviewPage(world));
   if (section === 'onboarding') return serveOnboarding(world, id, { request, response });
   if (section === 'checkout') return serveCheckout(world, id, { request, response });
-  if (world.failure() === 'drop') return void request.destroy();
+  if (world.failure() === 'drop') return void request.socket.destroy();
   if (world.failure() === 'refuse') {
     return answerJson(response, 503, { error: { type: 'api_error', message: 'The payment service is not available.' } });
   }

@@ -63,8 +63,8 @@ export async function startStorageServer(options: StorageServerOptions): Promise
     if (pathname === '/control' && request.method === 'POST') {
       return void setFailure(request, response, (mode) => (failure = mode));
     }
-    if (failure === 'drop') return void request.destroy();
-    if (failure === 'cut' && request.method === 'PUT') return void request.once('data', () => request.destroy());
+    if (failure === 'drop') return void request.socket.destroy();
+    if (failure === 'cut' && request.method === 'PUT') return void request.once('data', () => request.socket.destroy());
     if (failure === 'refuse') return answerError(response, new S3Error('SlowDown', 'Reduce your request rate.'));
     if (isAnonymous(request, searchParams)) return answerError(response, new S3Error('AccessDenied', 'Access Denied'));
 

@@ -2,7 +2,6 @@ import type { Readable } from 'node:stream';
 import {
   DeleteObjectCommand,
   GetObjectCommand,
-  HeadBucketCommand,
   HeadObjectCommand,
   PutObjectCommand,
   S3ServiceException,
@@ -113,20 +112,21 @@ export async function deleteUnverifiedUpload(key: string, storage: Storage = own
   await reaching(() => storage.client.send(new DeleteObjectCommand({ Bucket: storage.bucket, Key: key })));
 }
 
-/** Whether storage answers and our bucket is there. Throws if not. */
+/** Whether storage answers, knows us and has our bucket. Throws if not. */
 export async function checkStorage(storage: Storage = ownStorage()): Promise<void> {
-  const found = await reaching(() => storage.client.send(new HeadBucketCommand({ Bucket: storage.bucket })));
-  if (found === null) throw new AppError('unavailable', `The bucket ${storage.bucket} does not exist.`);
+  // Looking for an object that is never there asks for no more rights than the work itself needs.
+  await reaching(() => storage.client.send(new GetObjectCommand({ Bucket: storage.bucket, Key: '.ready' })));
 }
 
-/** Null for what is not there; one refusal, with a way on, for a storage that cannot be reached. */
+/** Null for what is not there; one refusal, with a way on, for a storage that cannot be used. */
 async function reaching<T>(work: () => Promise<T>): Promise<T | null> {
   try {
     return await work();
   } catch (error) {
-    if (error instanceof S3ServiceException && error.$metadata.httpStatusCode === 404) return null;
-    if (error instanceof S3ServiceException && (error.$metadata.httpStatusCode ?? 500) < 500) throw error;
-    throw new AppError('unavailable', 'The file store does not answer just now. Nothing is lost; try again in a minute.', {
+    const isService = error instanceof S3ServiceException;
+    if (isService && error.$metadata.httpStatusCode === 404 && error.name !== 'NoSuchBucket') return null;
+    // The client's own error carries the whole signed request. It must not get into a log, so only its name goes on.
+    throw new AppError('unavailable', 'The file store does not answer as it should. Nothing is lost; try again in a minute.', {
       extra: { reason: error instanceof Error ? error.name : 'unknown' },
     });
   }
