@@ -102,6 +102,7 @@ export const DOOR_GRANTS: Record<string, readonly Verb[] | Columns> = {
   invitations: KEEP,
   mailed_links: KEEP,
   api_tokens: { select: ['id', 'shop_id', 'user_id', 'token_hash', 'scopes', 'expires_at', 'revoked_at', 'name'], update: ['last_used_at'] },
+  throttles: EDIT,
   idempotency_keys: KEEP,
   batches: { select: ['id', 'shop_id', 'processor_id', 'number', 'stage', 'order_number'] },
   batch_links: { select: ['id', 'shop_id', 'batch_id', 'processor_id', 'token_hash', 'withdrawn_at', 'first_opened_at'], update: ['first_opened_at'] },

@@ -1,5 +1,5 @@
 import { sql } from 'drizzle-orm';
-import { boolean, check, index, integer, jsonb, pgEnum, pgPolicy, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
+import { bigint, boolean, check, index, integer, jsonb, pgEnum, pgPolicy, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
 
 import { appPortal, appShop, createdColumn, doorOnly, idColumn, moment } from './columns';
 import { processors, shops } from './organisations';
@@ -144,4 +144,14 @@ export const idempotencyKeys = pgTable(
     pgPolicy('own_keys_only_portal', { for: 'all', to: appPortal, using: sql`owner = (select current_key_owner())`, withCheck: sql`owner = (select current_key_owner())` }),
     doorOnly(),
   ],
+);
+
+/**
+ * How often somebody tried lately, by account and by address. Columns and their order are what rate-limiter-flexible
+ * writes; the key is a hash, so the table does not list who has an account.
+ */
+export const throttles = pgTable(
+  'throttles',
+  { key: text('key').primaryKey(), points: integer('points').notNull().default(0), expire: bigint('expire', { mode: 'number' }) },
+  () => [doorOnly()],
 );
