@@ -64,7 +64,7 @@ export function stackSettings(kind: StackKind, environment: Given, root: string)
       NEXT_DIST_DIR: kind === 'test' ? '.next-test' : '.next',
       NEXT_TELEMETRY_DISABLED: '1',
       // Its only warning says that versions after ours will want another Node; ours are pinned.
-      AWS_SDK_JS_SUPPRESS_MAINTENANCE_MODE_MESSAGE: '1',
+      AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true',
       LOG_LEVEL: given['LOG_LEVEL'] ?? 'info',
     },
   };
