@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { getTidelineEndpoint } from '@/lib/tideline/endpoints';
+
+export const GET = serve(getTidelineEndpoint);
