@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { listAuditFiltersEndpoint } from '@/lib/audit/endpoints';
+
+export const GET = serve(listAuditFiltersEndpoint);

@@ -1,0 +1,53 @@
+/** A kind of thing as it is said: `sent_mail` is a "sent mail". */
+export const kindWords = (entity: string): string => entity.replaceAll('_', ' ');
+
+/** What was done, from `thing.verb_of_it`: "dispatch", "withdraw approval". */
+export function actionWords(action: string): string {
+  const verb = action.slice(action.indexOf('.') + 1);
+  return verb.replaceAll(/[._]/g, ' ');
+}
+
+const PAGES: Record<string, string> = {
+  batch: '/batches',
+  lot: '/lots',
+  part: '/parts',
+  assembly: '/assemblies',
+  invoice: '/invoices',
+  processor: '/processors',
+  certificate: '/certificates',
+  nonconformance: '/nonconformances',
+};
+
+/** The page of a thing, where it has one. */
+export function pageOfThing(entity: string, id: string): string | null {
+  const page = PAGES[entity];
+  return page === undefined ? null : `${page}/${id}`;
+}
+
+export interface Change {
+  field: string;
+  before: string | null;
+  after: string | null;
+}
+
+/** The fields that are different, in words; with one side only, all of that side. */
+export function changesBetween(before: Record<string, unknown> | null, after: Record<string, unknown> | null): Change[] {
+  const names = [...new Set([...Object.keys(before ?? {}), ...Object.keys(after ?? {})])];
+  return names
+    .map((name) => ({ field: fieldWords(name), before: valueWords(before?.[name]), after: valueWords(after?.[name]) }))
+    .filter((change) => change.before !== change.after);
+}
+
+const fieldWords = (name: string): string =>
+  name
+    .replaceAll(/([A-Z])/g, ' $1')
+    .replaceAll('_', ' ')
+    .toLowerCase();
+
+function valueWords(value: unknown): string | null {
+  if (value === undefined || value === null || value === '') return null;
+  if (typeof value === 'string') return value;
+  if (typeof value === 'boolean') return value ? 'yes' : 'no';
+  if (Array.isArray(value) && value.every((item) => typeof item !== 'object')) return value.join(', ');
+  return JSON.stringify(value);
+}
