@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto';
 
 import { primary, replica } from '@/db/pools';
-import { withTenant, type Tx } from '@/db/client';
+import { withTenant } from '@/db/client';
 import type { Endpoint } from '@/lib/api/endpoint';
 import { authorize } from '@/lib/auth/authorize';
 import { personOf, type Ctx } from '@/lib/auth/context';
@@ -52,18 +52,16 @@ async function answer(endpoint: Endpoint, request: Request, params: Record<strin
   const address = request.headers.get('x-forwarded-for')?.split(',')[0]?.trim() ?? null;
   const key = isRead ? null : request.headers.get('idempotency-key');
 
-  const work = async (tx: Tx): Promise<unknown> => {
-    const ctx: Ctx = { tenant: identity.tenant, actor: identity.actor, tx, now, requestId, address };
-    const result = await endpoint.run(ctx, input);
+  const owner = keyOwnerOf(identity);
+  const inTenant = <T>(work: (ctx: Ctx) => Promise<T>): Promise<T> =>
+    withTenant(isRead ? replica() : primary(), identity.tenant, (tx) => work({ tenant: identity.tenant, actor: identity.actor, tx, now, requestId, address }), owner);
+
+  const found = await endpoint.outside?.({ inTenant }, input);
+  const work = async (ctx: Ctx): Promise<unknown> => {
+    const result = await endpoint.run(ctx, input, found);
     return result instanceof Response ? result : declaration.response.parse(result);
   };
-  const owner = keyOwnerOf(identity);
-  const result = await withTenant(
-    isRead ? replica() : primary(),
-    identity.tenant,
-    (tx) => (key === null ? work(tx) : once(tx, { owner, key, operation: declaration.id, requestHash: hashOf(input), now }, () => work(tx))),
-    owner,
-  );
+  const result = await inTenant((ctx) => (key === null ? work(ctx) : once(ctx.tx, { owner, key, operation: declaration.id, requestHash: hashOf(input), now }, () => work(ctx))));
   if (result instanceof Response) return result;
   return Response.json(result, { headers: { 'x-request-id': requestId, 'cache-control': 'no-store' } });
 }

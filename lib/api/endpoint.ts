@@ -34,11 +34,22 @@ export function declare<Input extends z.ZodObject, Response extends z.ZodType>(g
   return given;
 }
 
+/** What a step outside the transaction works with. Network calls stand between transactions, never inside one. */
+export interface Outside {
+  /** A short transaction of its own, as the caller. */
+  inTenant<T>(work: (ctx: Ctx) => Promise<T>): Promise<T>;
+}
+
 /** A declaration with the verb or query that does it. Lives on the server only. */
 export interface Endpoint<D extends Declaration = Declaration> {
   declaration: D;
-  /** Returns what `response` describes (Dates allowed where it says a moment), or a web Response for a binary answer. */
-  run(ctx: Ctx, input: z.output<D['input']>): Promise<unknown>;
+  /** Network calls that must come first. Runs once the caller may do this and the input is right; safe to run twice. */
+  outside?(outside: Outside, input: z.output<D['input']>): Promise<unknown>;
+  /**
+   * Returns what `response` describes (Dates allowed where it says a moment), or a web Response for a binary answer.
+   * `found` is what `outside` brought.
+   */
+  run(ctx: Ctx, input: z.output<D['input']>, found?: unknown): Promise<unknown>;
 }
 
 export function endpoint<D extends Declaration>(
@@ -46,4 +57,15 @@ export function endpoint<D extends Declaration>(
   run: (ctx: Ctx, input: z.output<D['input']>) => Promise<z.input<D['response']> | Response>,
 ): Endpoint<D> {
   return { declaration, run };
+}
+
+/** For what needs the network: first `outside`, then `run` in the request's one transaction with what it brought. */
+export function endpointInSteps<D extends Declaration, Found>(
+  declaration: D,
+  steps: {
+    outside(outside: Outside, input: z.output<D['input']>): Promise<Found>;
+    run(ctx: Ctx, input: z.output<D['input']>, found: Found): Promise<z.input<D['response']> | Response>;
+  },
+): Endpoint<D> {
+  return { declaration, ...steps } as Endpoint<D>;
 }

@@ -53,8 +53,8 @@ export const PERMISSIONS = {
   'dossier.read': EVERYONE_IN_SHOP,
   'dossier.share': ['inspector', 'admin'],
 
-  'file.read': EVERYONE_IN_SHOP,
-  'file.add': ['lead', 'inspector', 'office', 'admin'],
+  'file.read': [...EVERYONE_IN_SHOP, 'processor'],
+  'file.add': ['lead', 'inspector', 'office', 'admin', 'processor'],
 
   'portal.read': ['processor'],
   'portal.answer': ['processor'],
