@@ -1,8 +1,9 @@
 import { z } from 'zod';
 
 import { declare } from '@/lib/api/endpoint';
-import { Id, Moment, PageQuery, pageOf } from '@/lib/api/shapes';
+import { Day, Id, Moment, PageQuery, Pieces, pageOf } from '@/lib/api/shapes';
 import { PROCESSES } from '@/lib/parts/process';
+import { ToProve } from '@/lib/parts/to-prove';
 
 import { STAGES } from './stage';
 
@@ -24,6 +25,35 @@ export const BatchRow = z.object({
 });
 export type BatchRow = z.output<typeof BatchRow>;
 
+/** What every write tells: which batch, and the version to send with the next change. */
+export const BatchRef = z.object({ id: Id, number: z.string(), version: z.int() });
+
+/** The version of the batch that the person saw; an older one is refused, so that nobody's change is lost. */
+const Seen = z.object({ batchId: Id, version: z.int().min(1) });
+
+const Price = z.int('Enter an amount.').min(0, 'Enter 0 or more.').max(100_000_000, 'Enter 1,000,000.00 or less.');
+const Note = z.string().trim().max(2000, 'Keep it under 2000 letters.');
+
+export const NewLine = z.object({
+  lotId: Id,
+  /** The step of its route that the pieces wait for. */
+  stepId: Id,
+  pieces: Pieces,
+  unitPriceMinor: Price.default(0),
+  /** The named pieces of a serialised lot; without them the first by serial are taken. */
+  pieceIds: z.array(Id).max(1000).optional(),
+});
+export type NewLine = z.output<typeof NewLine>;
+
+/** What the lead may set of a batch beside its lines. */
+const Terms = z.object({
+  leavesOn: Day.nullable(),
+  wantedBackOn: Day.nullable(),
+  note: Note.nullable(),
+  lotMinimumMinor: Price,
+  certificationFeeMinor: Price,
+});
+
 export const listBatches = declare({
   id: 'listBatches',
   method: 'get',
@@ -33,4 +63,93 @@ export const listBatches = declare({
   permission: 'batch.read',
   input: PageQuery.extend({ stage: z.enum(STAGES).optional(), processorId: Id.optional() }),
   response: pageOf(BatchRow),
+});
+
+export const createBatch = declare({
+  id: 'createBatch',
+  method: 'post',
+  path: '/batches',
+  summary: 'Build a batch for one processor from lots that wait for the same step',
+  side: 'shop',
+  permission: 'batch.build',
+  input: z.object({ processorId: Id, lines: z.array(NewLine).min(1, 'Add at least one lot.').max(200) }).extend(Terms.partial().shape),
+  response: BatchRef,
+});
+export type CreateBatchInput = z.output<(typeof createBatch)['input']>;
+
+export const addLine = declare({
+  id: 'addBatchLine',
+  method: 'post',
+  path: '/batches/{batchId}/lines',
+  summary: 'Put pieces of a lot on the batch; reserves them',
+  side: 'shop',
+  permission: 'batch.build',
+  input: NewLine.extend({ batchId: Id }),
+  response: BatchRef.extend({ lineId: Id }),
+});
+
+export const changeLine = declare({
+  id: 'changeBatchLine',
+  method: 'patch',
+  path: '/batches/{batchId}/lines/{lineId}',
+  summary: 'Change pieces, price or load of a line',
+  side: 'shop',
+  permission: 'batch.build',
+  input: Seen.extend({ lineId: Id, pieces: Pieces.optional(), unitPriceMinor: Price.optional(), loadNo: z.int().min(1).max(9).nullable().optional() }),
+  response: BatchRef,
+});
+
+export const removeLine = declare({
+  id: 'removeBatchLine',
+  method: 'delete',
+  path: '/batches/{batchId}/lines/{lineId}',
+  summary: 'Take a line out; its pieces wait for the step again',
+  side: 'shop',
+  permission: 'batch.build',
+  input: Seen.extend({ lineId: Id }),
+  response: BatchRef,
+});
+
+export const updateBatch = declare({
+  id: 'updateBatch',
+  method: 'patch',
+  path: '/batches/{batchId}',
+  summary: 'Change processor, days, prices or note of a batch that is being built',
+  side: 'shop',
+  permission: 'batch.build',
+  input: Seen.extend({ processorId: Id.optional() }).extend(Terms.partial().shape),
+  response: BatchRef,
+});
+
+export const setRequirements = declare({
+  id: 'setRequirements',
+  method: 'put',
+  path: '/batches/{batchId}/requirements',
+  summary: 'Say what must be proved for one line, or (line null) for the whole batch',
+  side: 'shop',
+  permission: 'batch.build',
+  input: Seen.extend({ lineId: Id.nullable(), requirements: z.array(ToProve).max(60) }),
+  response: BatchRef,
+});
+
+export const putBatchAside = declare({
+  id: 'putBatchAside',
+  method: 'post',
+  path: '/batches/{batchId}/aside',
+  summary: 'Put a batch aside, or take it up again',
+  side: 'shop',
+  permission: 'batch.build',
+  input: Seen.extend({ aside: z.boolean() }),
+  response: BatchRef,
+});
+
+export const dispatchBatch = declare({
+  id: 'dispatchBatch',
+  method: 'post',
+  path: '/batches/{batchId}/dispatch',
+  summary: 'Send the batch: freeze it, make its papers, move the pieces, write to the processor',
+  side: 'shop',
+  permission: 'batch.dispatch',
+  input: Seen,
+  response: BatchRef,
 });

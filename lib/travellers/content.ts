@@ -1,0 +1,73 @@
+import { z } from 'zod';
+
+import { FrozenLine } from '@/lib/batches/frozen-line';
+import { PROCESSES } from '@/lib/parts/process';
+
+/** Sheet sizes of the papers. */
+export const PAPERS = ['letter', 'a4'] as const;
+export type Paper = (typeof PAPERS)[number];
+
+const Party = z.object({ name: z.string(), address: z.array(z.string()), phone: z.string().nullable() });
+
+const ContentLine = FrozenLine.extend({ lineNo: z.int(), pieces: z.int(), loadNo: z.int().nullable() });
+
+const ContentRequirement = z.object({
+  /** The lines it holds for; none named: all. */
+  lines: z.array(z.int()),
+  characteristic: z.string(),
+  limit: z.string(),
+  unit: z.string(),
+  source: z.string(),
+});
+
+/**
+ * All that a batch's papers show, kept as it was stated: what is made from it again is the same to the byte. Later
+ * layouts read older contents, so fields are only ever added, with a default.
+ */
+const Stated = z.object({
+  documentVersion: z.int(),
+  paper: z.enum(PAPERS),
+  number: z.string(),
+  orderNumber: z.string(),
+  /** Where days and times are told. */
+  zone: z.string(),
+  statedAt: z.iso.datetime(),
+  statedBy: z.string(),
+  dispatchedAt: z.iso.datetime().nullable(),
+  wantedBackOn: z.string().nullable(),
+  shop: Party,
+  processor: Party,
+  process: z.enum(PROCESSES),
+  specification: z.string(),
+  note: z.string().nullable(),
+  /** What is different from the version before, in words. */
+  changes: z.array(z.string()),
+});
+
+export const TravellerContent = Stated.extend({
+  kind: z.literal('traveller'),
+  lines: z.array(ContentLine),
+  requirements: z.array(ContentRequirement),
+  cautions: z.array(z.string()),
+  /** Blockers that were let pass, with who did and why. */
+  overrides: z.array(z.object({ what: z.string(), reason: z.string(), by: z.string(), at: z.iso.datetime() })),
+  /** The link that its code opens, and where links begin. The key itself is not kept. Null on a draft. */
+  link: z.object({ base: z.string(), linkId: z.string() }).nullable(),
+});
+export type TravellerContent = z.infer<typeof TravellerContent>;
+
+export const OrderContent = Stated.extend({
+  kind: z.literal('purchase_order'),
+  currency: z.string(),
+  lotMinimumMinor: z.int(),
+  certificationFeeMinor: z.int(),
+  lines: z.array(ContentLine.pick({ lineNo: true, pieces: true, partNumber: true, partRevision: true, partName: true, lotNumber: true, conditionBefore: true, targetCondition: true }).extend({ unitPriceMinor: z.int() })),
+  requirements: z.array(ContentRequirement),
+});
+export type OrderContent = z.infer<typeof OrderContent>;
+
+export const PaperContent = z.discriminatedUnion('kind', [TravellerContent, OrderContent]);
+export type PaperContent = z.infer<typeof PaperContent>;
+
+/** Shops that count in dollars print on Letter, all others on A4. */
+export const paperOf = (currency: string): Paper => (currency === 'USD' || currency === 'CAD' ? 'letter' : 'a4');
