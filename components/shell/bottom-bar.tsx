@@ -28,7 +28,10 @@ export function BottomBar(props: BottomBarProps) {
   const home = sections[0];
   const atHome = home ? isInSection(path, home) : false;
   return (
-    <div className="lw-bottom fixed inset-x-0 bottom-0 z-30 grid h-[60px] grid-cols-[1fr_1fr_1.2fr_1fr] border-t-heavy border-ink bg-paper md:hidden">
+    <nav
+      aria-label="Main"
+      className="lw-bottom fixed inset-x-0 bottom-0 z-30 grid h-[60px] grid-cols-[1fr_1fr_1.2fr_1fr] border-t-heavy border-ink bg-paper md:hidden"
+    >
       {home && (
         <Link
           href={home.href}
@@ -72,6 +75,6 @@ export function BottomBar(props: BottomBarProps) {
         </p>
         {personPanel}
       </div>
-    </div>
+    </nav>
   );
 }

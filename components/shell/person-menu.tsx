@@ -30,7 +30,7 @@ export function PersonMenu({ organisation, person, roles, children }: PersonMenu
         popover="auto"
         aria-label={`${person}, choices`}
         role="dialog"
-        className="fixed inset-auto top-12 right-4 m-0 max-h-[calc(100dvh-4rem)] w-80 overflow-y-auto border-heavy border-ink bg-paper p-4 text-ink"
+        className="fixed inset-auto top-12 right-6 m-0 max-h-[calc(100dvh-4rem)] w-80 overflow-y-auto border-heavy border-ink bg-paper p-4 text-ink"
       >
         {children}
       </div>

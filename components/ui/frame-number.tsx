@@ -21,7 +21,11 @@ export function StepNumber({ number, state = 'open' }: FrameNumberProps) {
   );
 }
 
-const FRAMES = ['border', 'border-[3px] border-double', 'border-[5px] border-double'];
+const FRAMES = [
+  'border-[1.25px]',
+  'border-[3px] border-double',
+  'border-[3px] border-double outline-1 outline-offset-1 outline-ink',
+];
 
 /** Load 1 in a single frame, 2 in a double, 3 in a triple: it survives a bad copier. */
 export function LoadNumber({ number }: { number: number }) {

@@ -33,7 +33,7 @@ export function Table({ label, columns, children, dense = false, keep = false, c
         aria-label={label}
         className={`lw-table ${dense ? 'lw-table-dense' : ''} ${keep ? 'lw-table-keep' : ''}`}
       >
-        <thead role="rowgroup">
+        <thead role="rowgroup" className={columns.every((column) => column.hidden) ? 'sr-only' : ''}>
           <tr role="row">
             {columns.map((column, index) => (
               <ColumnName key={index} column={column} />
