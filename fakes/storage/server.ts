@@ -116,8 +116,8 @@ if (isProgram(import.meta.url)) {
     startStorageServer({
       port: portFromEnv('FAKE_STORAGE_PORT', 4690),
       dir: process.env['FAKE_STORAGE_DIR'] ?? path.join('.data', 'storage'),
-      host: process.env['FAKE_HOST'] ?? '127.0.0.1',
-      bucket: process.env['S3_BUCKET'] ?? 'lotwright',
+      host: process.env['FAKE_HOST'] || '127.0.0.1',
+      bucket: process.env['S3_BUCKET'] || 'lotwright',
       accessKeyId: process.env['S3_ACCESS_KEY_ID'] ?? 'S3RVER',
       secretAccessKey: process.env['S3_SECRET_ACCESS_KEY'] ?? 'S3RVER',
       origins: originsFromEnv(),
