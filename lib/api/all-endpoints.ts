@@ -1,5 +1,9 @@
 import * as audit from '@/lib/audit/endpoints';
 import * as batches from '@/lib/batches/endpoints';
+import * as certificates from '@/lib/certificates/endpoints';
+import * as files from '@/lib/files/endpoints';
+import * as nonconformances from '@/lib/nonconformances/endpoints';
+import * as receipts from '@/lib/receipts/endpoints';
 import * as search from '@/lib/search/endpoints';
 import * as session from '@/lib/session/endpoints';
 import * as tideline from '@/lib/tideline/endpoints';
@@ -7,4 +11,4 @@ import * as tideline from '@/lib/tideline/endpoints';
 import type { Endpoint } from './endpoint';
 
 /** Every read and write there is: what the documentation and the walk over all permissions go by. */
-export const ALL_ENDPOINTS: readonly Endpoint[] = [audit, batches, search, session, tideline].flatMap((domain) => Object.values(domain) as unknown as Endpoint[]);
+export const ALL_ENDPOINTS: readonly Endpoint[] = [audit, batches, certificates, files, nonconformances, receipts, search, session, tideline].flatMap((domain) => Object.values(domain) as unknown as Endpoint[]);

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { decideRequirementEndpoint } from '@/lib/certificates/endpoints';
+
+export const PUT = serve(decideRequirementEndpoint);

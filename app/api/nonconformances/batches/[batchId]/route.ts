@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { getRaisableEndpoint } from '@/lib/nonconformances/endpoints';
+
+export const GET = serve(getRaisableEndpoint);

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { findForReceivingEndpoint } from '@/lib/receipts/endpoints';
+
+export const GET = serve(findForReceivingEndpoint);

@@ -1,0 +1,20 @@
+import { endpoint } from '@/lib/api/endpoint';
+
+import { addCertificate } from './add-certificate';
+import * as contract from './contract';
+import { decideRequirement } from './decide-requirement';
+import { getCertificate } from './get-certificate';
+import { listCertificates } from './list-certificates';
+import { recordCertificate } from './record-certificate';
+import { setAsideCertificate } from './set-aside-certificate';
+import { signCertificate } from './sign-certificate';
+import { takeUpCertificate } from './take-up-certificate';
+
+export const listCertificatesEndpoint = endpoint(contract.listCertificates, listCertificates);
+export const getCertificateEndpoint = endpoint(contract.getCertificate, getCertificate);
+export const addCertificateEndpoint = endpoint(contract.addCertificate, addCertificate);
+export const recordCertificateEndpoint = endpoint(contract.recordCertificate, recordCertificate);
+export const decideRequirementEndpoint = endpoint(contract.decideRequirement, decideRequirement);
+export const setAsideCertificateEndpoint = endpoint(contract.setAsideCertificate, setAsideCertificate);
+export const takeUpCertificateEndpoint = endpoint(contract.takeUpCertificate, takeUpCertificate);
+export const signCertificateEndpoint = endpoint(contract.signCertificate, signCertificate);
