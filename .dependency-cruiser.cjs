@@ -10,17 +10,22 @@ module.exports = {
   forbidden: [
     {
       name: 'rules-are-pure',
-      comment: 'lib/trade and lib/evidence: values in, verdict out. No database, clock, network, environment, React.',
+      comment:
+        'lib/trade and lib/evidence: values in, verdict out. No database, clock, network, environment, React.',
       severity: 'error',
       from: { path: '^lib/(trade|evidence)/' },
       to: { pathNot: '^lib/(trade|evidence)/' },
     },
     {
       name: 'lib-is-framework-free',
-      comment: 'The only code that knows Next is in app/. React is for documents, mails and the browser hooks.',
+      comment:
+        'The only code that knows Next is in app/. React is for documents, mails and the browser hooks.',
       severity: 'error',
       from: { path: '^(lib|db)/', pathNot: '^lib/(pdf/|documents/|mail/|api/[^/]*hooks)' },
-      to: { path: ['node_modules/(next|react|react-dom)/', '^next(/|$)', '^react(/|$)', '^(app|components)/'], ...TYPE_ONLY },
+      to: {
+        path: ['node_modules/(next|react|react-dom)/', '^next(/|$)', '^react(/|$)', '^(app|components)/'],
+        ...TYPE_ONLY,
+      },
     },
     {
       name: 'lib-knows-no-screen',
@@ -40,7 +45,12 @@ module.exports = {
       severity: 'error',
       from: { path: '^components/' },
       to: {
-        path: ['^(db|app|fakes|emails)/', '^lib/env', '^lib/[^/]+/(queries|endpoints)', 'node_modules/(pg|drizzle-orm)/'],
+        path: [
+          '^(db|app|fakes|emails)/',
+          '^lib/env',
+          '^lib/[^/]+/(queries|endpoints)',
+          'node_modules/(pg|drizzle-orm)/',
+        ],
         ...TYPE_ONLY,
       },
     },

@@ -4,5 +4,7 @@ export default defineConfig({
   dialect: 'postgresql',
   schema: './db/schema/*.ts',
   out: './drizzle',
-  dbCredentials: { url: process.env['DATABASE_OWNER_URL'] ?? 'postgres://lotwright_owner@127.0.0.1:4632/lotwright' },
+  dbCredentials: {
+    url: process.env['DATABASE_OWNER_URL'] ?? 'postgres://lotwright_owner@127.0.0.1:4632/lotwright',
+  },
 });

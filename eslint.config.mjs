@@ -70,7 +70,15 @@ const rules = [
   },
   {
     // These start, set up or watch processes: they speak to the terminal and hand the environment on.
-    files: ['lib/env.ts', 'lib/stack/**', 'fakes/**', '*.config.ts', '*.config.mjs', 'db/cluster.ts', 'db/postgres-binaries.ts'],
+    files: [
+      'lib/env.ts',
+      'lib/stack/**',
+      'fakes/**',
+      '*.config.ts',
+      '*.config.mjs',
+      'db/cluster.ts',
+      'db/postgres-binaries.ts',
+    ],
     rules: { 'no-restricted-syntax': 'off', 'no-console': 'off' },
   },
   {

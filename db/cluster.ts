@@ -33,6 +33,8 @@ export interface Cluster {
   readonly superUrl: string;
   /** False when another living process runs it: then `stop` leaves it alone. */
   readonly startedHere: boolean;
+  readonly logFile: string;
+  isRunning(): boolean;
   stop(): Promise<void>;
 }
 
@@ -46,13 +48,18 @@ export async function openCluster({ folder, port, throwAway, report }: ClusterOp
   const ownerFile = `${place}.owner`;
   const superUrl = `postgresql://postgres@127.0.0.1:${port}/postgres`;
 
+  const logFile = join(place, 'server.log');
+  const isRunning = () => runningServer(place) !== undefined;
+
   const running = runningServer(place);
   if (running && ownerIsAlive(ownerFile)) {
     if (running.port !== port) {
-      throw new CannotStart(`The database in ${place} is already running, on port ${running.port} instead of ${port}.`);
+      throw new CannotStart(
+        `The database in ${place} is already running, on port ${running.port} instead of ${port}.`,
+      );
     }
     await ensureRolesAndDatabase(superUrl);
-    return { superUrl, startedHere: false, stop: () => Promise.resolve() };
+    return { superUrl, startedHere: false, logFile, isRunning, stop: () => Promise.resolve() };
   }
   // Whoever started it was killed before he could stop it.
   if (running) await stopServer(place, running.pid);
@@ -66,13 +73,12 @@ export async function openCluster({ folder, port, throwAway, report }: ClusterOp
   removeStalePid(place);
 
   const options = [...SETTINGS, ...(throwAway ? FAST_AND_UNSAFE : [])].map((setting) => `-c ${setting}`);
-  const serverLog = join(place, 'server.log');
   const started = await runAsServer(join(bin, 'pg_ctl'), [
-    ...['-D', place, '-w', '-t', '60', '-l', serverLog],
+    ...['-D', place, '-w', '-t', '60', '-l', logFile],
     ...['-o', `-h 127.0.0.1 -p ${port} -k '' ${options.join(' ')}`, 'start'],
   ]);
   if (started.code !== 0) {
-    throw new CannotStart(`PostgreSQL did not start in ${place}:\n${lastLines(serverLog, started.output)}`);
+    throw new CannotStart(`PostgreSQL did not start in ${place}:\n${lastLines(logFile, started.output)}`);
   }
   writeFileSync(ownerFile, JSON.stringify({ pid: process.pid, startedAt: startedAt(process.pid) }));
 
@@ -80,6 +86,8 @@ export async function openCluster({ folder, port, throwAway, report }: ClusterOp
   return {
     superUrl,
     startedHere: true,
+    logFile,
+    isRunning,
     async stop() {
       await runAsServer(join(bin, 'pg_ctl'), ['-D', place, '-m', 'fast', '-w', '-t', '30', 'stop']);
       rmSync(ownerFile, { force: true });
@@ -134,7 +142,9 @@ async function reachablePlace(folder: string, report: Report): Promise<string> {
   const name = createHash('sha256').update(folder).digest('hex').slice(0, 12);
   const elsewhere = join('/var/lib/lotwright', name);
   mkdirSync('/var/lib/lotwright', { recursive: true, mode: 0o755 });
-  report(`The postgres account may not enter ${dirname(folder)}; the database lives in ${elsewhere} instead.`);
+  report(
+    `The postgres account may not enter ${dirname(folder)}; the database lives in ${elsewhere} instead.`,
+  );
   return elsewhere;
 }
 
@@ -143,7 +153,9 @@ function demandOwn(folder: string): void {
   try {
     accessSync(folder, constants.R_OK | constants.W_OK | constants.X_OK);
   } catch {
-    throw new CannotStart(`${folder} belongs to another user: start Lotwright as that user, or from a copy of your own.`);
+    throw new CannotStart(
+      `${folder} belongs to another user: start Lotwright as that user, or from a copy of your own.`,
+    );
   }
 }
 
@@ -157,7 +169,8 @@ async function makeCluster(bin: string, place: string): Promise<void> {
 
   const options = ['-U', 'postgres', '-A', 'trust', '-E', 'UTF8', '--locale=C.UTF-8'];
   const made = await runAsServer(join(bin, 'initdb'), ['-D', place, ...options]);
-  if (made.code !== 0) throw new CannotStart(`PostgreSQL could not make a cluster in ${place}:\n${made.output}`);
+  if (made.code !== 0)
+    throw new CannotStart(`PostgreSQL could not make a cluster in ${place}:\n${made.output}`);
   rmSync(incompleteMarker(place));
 }
 

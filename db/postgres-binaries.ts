@@ -79,7 +79,10 @@ export function runApt(args: readonly string[]): Promise<void> {
     child.on('error', reject);
     child.on('close', (code) => {
       if (code === 0) resolve();
-      else reject(new CannotStart(`apt-get ${args.join(' ')} failed: ${complaint.trim() || `exit code ${code}`}`));
+      else
+        reject(
+          new CannotStart(`apt-get ${args.join(' ')} failed: ${complaint.trim() || `exit code ${code}`}`),
+        );
     });
   });
 }

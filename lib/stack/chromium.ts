@@ -10,5 +10,7 @@ export function chromiumPath(): string {
 
 export function findChromium(): string | undefined {
   const folders = (process.env['PATH'] ?? '').split(delimiter).concat('/usr/bin');
-  return NAMES.flatMap((name) => folders.map((folder) => join(folder, name))).find((file) => existsSync(file));
+  return NAMES.flatMap((name) => folders.map((folder) => join(folder, name))).find((file) =>
+    existsSync(file),
+  );
 }

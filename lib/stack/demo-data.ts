@@ -1,9 +1,9 @@
-import { spawn } from 'node:child_process';
 import { existsSync } from 'node:fs';
 import { Client } from 'pg';
 import { CannotStart } from '@/db/cannot-start';
 import { createDatabase, dropDatabase } from '@/db/cluster';
 import { prepareDatabase } from './prepare-database';
+import { runToEnd } from './run-to-end';
 
 const SEED = 'db/seed/seed.ts';
 /** Kept as the database's own comment: it is outside the data, and goes when the database goes. */
@@ -15,10 +15,11 @@ interface DemoOptions {
   readonly ownerUrl: string;
   readonly env: Readonly<Record<string, string>>;
   readonly report: (line: string) => void;
+  readonly onStart: (pid: number) => void;
 }
 
 /** Loads the story into an empty database. A story that was interrupted half way is thrown away and told again. */
-export async function loadDemoData({ superUrl, ownerUrl, env, report }: DemoOptions): Promise<void> {
+export async function loadDemoData({ superUrl, ownerUrl, env, report, onStart }: DemoOptions): Promise<void> {
   const database = new URL(ownerUrl).pathname.slice(1);
   const state = await demoState(superUrl, database);
   if (state === 'present') return;
@@ -30,7 +31,8 @@ export async function loadDemoData({ superUrl, ownerUrl, env, report }: DemoOpti
 
   report('Loading the demo data …');
   await setState(superUrl, { database, state: LOADING });
-  await runSeed(env);
+  const { code } = await runToEnd(['--import', 'tsx', SEED], { env, output: 'show', onStart });
+  if (code !== 0) throw new CannotStart(`The demo data could not be loaded (${SEED}); its message is above.`);
   await setState(superUrl, { database, state: LOADED });
 }
 
@@ -55,11 +57,20 @@ async function demoState(superUrl: string, database: string): Promise<'absent' |
   });
 }
 
-async function setState(superUrl: string, { database, state }: { database: string; state: string }): Promise<void> {
-  await within(superUrl, database, (client) => client.query(`comment on database "${database}" is '${state}'`));
+async function setState(
+  superUrl: string,
+  { database, state }: { database: string; state: string },
+): Promise<void> {
+  await within(superUrl, database, (client) =>
+    client.query(`comment on database "${database}" is '${state}'`),
+  );
 }
 
-async function within<T>(superUrl: string, database: string, work: (client: Client) => Promise<T>): Promise<T> {
+async function within<T>(
+  superUrl: string,
+  database: string,
+  work: (client: Client) => Promise<T>,
+): Promise<T> {
   const url = new URL(superUrl);
   url.pathname = `/${database}`;
   const client = new Client({ connectionString: url.href });
@@ -69,21 +80,4 @@ async function within<T>(superUrl: string, database: string, work: (client: Clie
   } finally {
     await client.end();
   }
-}
-
-function runSeed(env: Readonly<Record<string, string>>): Promise<void> {
-  return new Promise((resolve, reject) => {
-    const child = spawn(process.execPath, ['--import', 'tsx', SEED], {
-      env: { ...process.env, ...env },
-      stdio: ['ignore', 'inherit', 'inherit'],
-    });
-    const endSeed = () => child.kill('SIGTERM');
-    process.once('exit', endSeed);
-    child.once('error', reject);
-    child.once('close', (code) => {
-      process.off('exit', endSeed);
-      if (code === 0) resolve();
-      else reject(new CannotStart(`The demo data could not be loaded (${SEED}); its message is above.`));
-    });
-  });
 }

@@ -25,7 +25,9 @@ export function preparePackages() {
   const options = ['ci', '--ignore-scripts', '--no-audit', '--no-fund'];
   const { status, error } = spawnSync('npm', options, { stdio: ['ignore', 'inherit', 'inherit'] });
   if (error || status !== 0) {
-    fail(`npm could not install the packages (${error?.message ?? `exit code ${status}`}); see its messages above.`);
+    fail(
+      `npm could not install the packages (${error?.message ?? `exit code ${status}`}); see its messages above.`,
+    );
   }
   writeFileSync(STAMP, wanted);
 }

@@ -66,7 +66,10 @@ export function standIns({ ports, dataFolder, runsHere }: StackSettings): Part[]
 export function workerPart({ ports }: StackSettings, mode: WebMode): Part {
   return {
     name: 'worker',
-    args: [...(mode === 'dev' ? ['--watch', '--watch-preserve-output'] : []), ...typescript('lib/jobs/worker.ts')],
+    args: [
+      ...(mode === 'dev' ? ['--watch', '--watch-preserve-output'] : []),
+      ...typescript('lib/jobs/worker.ts'),
+    ],
     env: { NODE_ENV: mode === 'dev' ? 'development' : 'production' },
     health: `http://127.0.0.1:${ports.worker}/health`,
     ports: [ports.worker],

@@ -19,7 +19,9 @@ export async function claimRun(dataFolder: string, report: (line: string) => voi
   const file = join(dataFolder, 'run.json');
   const [previous, ...parts] = readRecord(file);
   if (previous && isSame(previous)) {
-    throw new CannotStart(`Lotwright already runs from this folder, as process ${previous.pid}: stop that one first.`);
+    throw new CannotStart(
+      `Lotwright already runs from this folder, as process ${previous.pid}: stop that one first.`,
+    );
   }
   const leftOver = parts.filter(isSame);
   if (leftOver.length > 0) {

@@ -39,7 +39,9 @@ export function startPart(
   let hasEnded = false;
   const ended = new Promise<string>((resolve) => {
     child.once('error', (error) => resolve(error.message));
-    child.once('exit', (code, signal) => resolve(signal ? `ended by ${signal}` : `ended with code ${code ?? '?'}`));
+    child.once('exit', (code, signal) =>
+      resolve(signal ? `ended by ${signal}` : `ended with code ${code ?? '?'}`),
+    );
   }).then((how) => {
     hasEnded = true;
     return how;
@@ -85,7 +87,11 @@ function waitUntilUp(
   return new Promise((resolve, reject) => {
     const attempt = async () => {
       if (death !== undefined) {
-        return reject(new CannotStart(`${part.name} ${death} before it was up. The end of ${logFile}:\n${lastLines(logFile)}`));
+        return reject(
+          new CannotStart(
+            `${part.name} ${death} before it was up. The end of ${logFile}:\n${lastLines(logFile)}`,
+          ),
+        );
       }
       if (await answers(part.health)) return resolve();
       if (Date.now() > giveUpAt) {

@@ -7,6 +7,7 @@ import { loadDemoData, resetDatabase } from './demo-data';
 import { type Part, standIns, type WebMode, webPart, workerPart } from './parts';
 import { prepareDatabase } from './prepare-database';
 import { claimRun } from './run-record';
+import { endAllRuns } from './run-to-end';
 import { answers, demandFreePorts, lastLines, type RunningPart, startPart } from './running-part';
 import { type StackSettings } from './settings';
 
@@ -19,6 +20,8 @@ export interface StackOptions {
 
 const STAND_IN_MS = 30_000;
 const BUILT_MS = 60_000;
+const WATCH_MS = 1_000;
+const DATABASE_AWAY_MS = 10_000;
 const DEV_MS = 60_000;
 
 /** Everything that runs together, brought up step by step and taken down in reverse. */
@@ -26,15 +29,12 @@ export class Stack {
   readonly #options: StackOptions;
   readonly #running: RunningPart[] = [];
   #claim: Awaited<ReturnType<typeof claimRun>> | undefined;
+  #opening: Promise<Cluster> | undefined;
   #cluster: Cluster | undefined;
   #stopping: Promise<void> | undefined;
 
   constructor(options: StackOptions) {
     this.#options = options;
-  }
-
-  get superUrl(): string | undefined {
-    return this.#cluster?.superUrl;
   }
 
   async claim(): Promise<void> {
@@ -46,12 +46,15 @@ export class Stack {
     const { settings, report } = this.#options;
     const ownerUrl = this.#ownerUrl();
     if (settings.runsHere.database) {
-      this.#cluster = await openCluster({
+      this.#opening = openCluster({
         folder: settings.clusterFolder,
         port: settings.ports.database,
         throwAway: settings.kind === 'test',
         report,
       });
+      this.#cluster = await this.#opening;
+      this.#demandGoingOn();
+      this.#watchDatabase(this.#cluster);
       if (reset) await resetDatabase(this.#cluster.superUrl, ownerUrl);
     }
     await prepareDatabase(ownerUrl);
@@ -75,18 +78,25 @@ export class Stack {
   async loadDemo(): Promise<void> {
     const { settings, report } = this.#options;
     if (!this.#cluster) return;
-    const ownerUrl = this.#ownerUrl();
-    await loadDemoData({ superUrl: this.#cluster.superUrl, ownerUrl, env: settings.env, report });
+    await loadDemoData({
+      superUrl: this.#cluster.superUrl,
+      ownerUrl: this.#ownerUrl(),
+      env: settings.env,
+      report,
+      onStart: this.#remember,
+    });
   }
 
-  async build({ force = false } = {}): Promise<void> {
-    await buildWeb(this.#options.settings, { force, report: this.#options.report });
+  async build(): Promise<void> {
+    await buildWeb(this.#options.settings, { report: this.#options.report, onStart: this.#remember });
   }
 
   async startProduct(mode: WebMode): Promise<void> {
     const { settings } = this.#options;
     const timeoutMs = mode === 'dev' ? DEV_MS : BUILT_MS;
-    await Promise.all([workerPart(settings, mode), webPart(settings, mode)].map((part) => this.#start(part, timeoutMs)));
+    await Promise.all(
+      [workerPart(settings, mode), webPart(settings, mode)].map((part) => this.#start(part, timeoutMs)),
+    );
   }
 
   /** Stops what this stack started and nothing else. Safe to call again. */
@@ -98,14 +108,15 @@ export class Stack {
   async #start(part: Part, timeoutMs: number): Promise<void> {
     const { settings, report, onDeath } = this.#options;
     const script = part.args.at(-1) ?? '';
-    if (script.endsWith('.ts') && !existsSync(script)) return report(`No ${part.name}: ${script} does not exist.`);
+    if (script.endsWith('.ts') && !existsSync(script))
+      return report(`No ${part.name}: ${script} does not exist.`);
 
     await demandFreePorts(part);
-    if (this.#stopping) throw new CannotStart('Stopped while starting.');
+    this.#demandGoingOn();
     const logFile = join(settings.dataFolder, 'logs', `${part.name}.log`);
     const running = startPart(part, { env: settings.env, logFile });
     this.#running.push(running);
-    this.#claim?.remember(running.pid);
+    this.#remember(running.pid);
     try {
       await running.isUp(timeoutMs);
     } catch (error) {
@@ -119,14 +130,37 @@ export class Stack {
     });
   }
 
+  /** It runs apart from us, and may be restarted by hand: only one that stays away is dead. */
+  #watchDatabase(cluster: Cluster): void {
+    let missed = 0;
+    const watch = setInterval(() => {
+      missed = cluster.isRunning() ? 0 : missed + 1;
+      if (missed * WATCH_MS < DATABASE_AWAY_MS || this.#stopping) return;
+      clearInterval(watch);
+      this.#options.onDeath(
+        `The database is gone. The end of ${cluster.logFile}:\n${lastLines(cluster.logFile)}`,
+      );
+    }, WATCH_MS);
+    watch.unref();
+  }
+
   async #stopAll(): Promise<void> {
+    endAllRuns();
     // The product first: it may still want to finish a request or a job with the services below it.
     const product = this.#running.filter(({ part }) => part.name === 'web' || part.name === 'worker');
     const services = this.#running.filter((running) => !product.includes(running));
     await Promise.all(product.map((running) => running.stop()));
     await Promise.all(services.map((running) => running.stop()));
-    await this.#cluster?.stop();
+    // Also one that is only just being started.
+    const cluster = await this.#opening?.catch(() => undefined);
+    await cluster?.stop();
     this.#claim?.release();
+  }
+
+  readonly #remember = (pid: number): void => this.#claim?.remember(pid);
+
+  #demandGoingOn(): void {
+    if (this.#stopping) throw new CannotStart('Stopped while starting.');
   }
 
   #ownerUrl(): string {

@@ -64,7 +64,11 @@ async function demandUsableEnvironment(): Promise<void> {
 }
 
 function endOnSignals(end: (code: number) => Promise<void>): void {
-  for (const [signal, code] of [['SIGINT', 130], ['SIGTERM', 143], ['SIGHUP', 129]] as const) {
+  for (const [signal, code] of [
+    ['SIGINT', 130],
+    ['SIGTERM', 143],
+    ['SIGHUP', 129],
+  ] as const) {
     process.on(signal, () => {
       if (isEnding) return;
       isEnding = true;
@@ -111,7 +115,9 @@ async function readSignIns(): Promise<readonly DemoSignIn[]> {
 
 function aligned(rows: readonly (readonly string[])[]): string {
   const widths = (rows[0] ?? []).map((_, column) => Math.max(...rows.map((row) => row[column]?.length ?? 0)));
-  return rows.map((row) => `  ${row.map((cell, column) => cell.padEnd(widths[column] ?? 0)).join('  ')}`.trimEnd()).join('\n');
+  return rows
+    .map((row) => `  ${row.map((cell, column) => cell.padEnd(widths[column] ?? 0)).join('  ')}`.trimEnd())
+    .join('\n');
 }
 
 await main();

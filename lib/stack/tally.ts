@@ -9,14 +9,19 @@ export interface Tally {
 export function tallyVitest(file: string, exitCode: number): Tally {
   const report = readReport<VitestReport>(file);
   const emptyFailures = (report?.testResults ?? []).filter(
-    ({ status, assertionResults }) => status === 'failed' && !assertionResults.some((test) => test.status === 'failed'),
+    ({ status, assertionResults }) =>
+      status === 'failed' && !assertionResults.some((test) => test.status === 'failed'),
   ).length;
   return settle(report?.numPassedTests ?? 0, (report?.numFailedTests ?? 0) + emptyFailures, exitCode);
 }
 
 export function tallyPlaywright(file: string, exitCode: number): Tally {
   const report = readReport<PlaywrightReport>(file);
-  return settle(report?.stats.expected ?? 0, (report?.stats.unexpected ?? 0) + (report?.stats.flaky ?? 0), exitCode);
+  return settle(
+    report?.stats.expected ?? 0,
+    (report?.stats.unexpected ?? 0) + (report?.stats.flaky ?? 0),
+    exitCode,
+  );
 }
 
 export function sum(tallies: readonly Tally[]): Tally {

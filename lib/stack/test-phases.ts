@@ -1,6 +1,6 @@
-import { type ChildProcess, spawn } from 'node:child_process';
 import { existsSync, mkdirSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
+import { runToEnd } from './run-to-end';
 import { type Tally, tallyPlaywright, tallyVitest } from './tally';
 
 type Env = Readonly<Record<string, string>>;
@@ -26,24 +26,33 @@ export const PHASES: readonly Phase[] = [
     async run(env) {
       // The types of the routes are generated; without them every page has an unknown `PageProps`.
       const generated = await runNode([NEXT, 'typegen'], env);
-      return check(generated === 0 ? await runNode([bin('typescript', 'bin', 'tsc'), '--noEmit'], env) : generated);
+      return check(
+        generated === 0 ? await runNode([bin('typescript', 'bin', 'tsc'), '--noEmit'], env) : generated,
+      );
     },
   },
   {
     name: 'lint',
     needs: 'nothing',
-    run: async (env) => check(await runNode([bin('eslint', 'bin', 'eslint.js'), '.', '--max-warnings', '0'], env)),
+    run: async (env) =>
+      check(await runNode([bin('eslint', 'bin', 'eslint.js'), '.', '--max-warnings', '0'], env)),
   },
   {
     name: 'boundaries',
     needs: 'nothing',
     async run(env) {
-      const folders = ['app', 'components', 'emails', 'lib', 'db', 'fakes'].filter((folder) => existsSync(folder));
+      const folders = ['app', 'components', 'emails', 'lib', 'db', 'fakes'].filter((folder) =>
+        existsSync(folder),
+      );
       const cruiser = bin('dependency-cruiser', 'bin', 'dependency-cruise.mjs');
       return check(await runNode([cruiser, '--config', '.dependency-cruiser.cjs', ...folders], env));
     },
   },
-  { name: 'unused', needs: 'nothing', run: async (env) => check(await runNode([bin('knip', 'bin', 'knip.js')], env)) },
+  {
+    name: 'unused',
+    needs: 'nothing',
+    run: async (env) => check(await runNode([bin('knip', 'bin', 'knip.js')], env)),
+  },
   { name: 'unit', needs: 'nothing', run: (env) => runVitest('unit', env) },
   { name: 'services', needs: 'database', run: (env) => runVitest('services', env) },
   { name: 'e2e', needs: 'stack', run: runPlaywright },
@@ -74,31 +83,10 @@ function freshReport(name: string): string {
   return file;
 }
 
-const check = (exitCode: number): Tally => (exitCode === 0 ? { passed: 1, failed: 0 } : { passed: 0, failed: 1 });
+const check = (exitCode: number): Tally =>
+  exitCode === 0 ? { passed: 1, failed: 0 } : { passed: 0, failed: 1 };
 
-let current: ChildProcess | undefined;
-
-export function endCurrentPhase(): void {
-  if (current?.pid === undefined) return;
-  try {
-    process.kill(-current.pid, 'SIGTERM');
-  } catch {
-    // It ended by itself in the meantime.
-  }
-}
-
-function runNode(args: readonly string[], env: Env): Promise<number> {
-  return new Promise((resolve) => {
-    const child = spawn(process.execPath, args, {
-      env: { ...process.env, ...env },
-      stdio: ['ignore', 'inherit', 'inherit'],
-      detached: true,
-    });
-    current = child;
-    child.once('error', () => resolve(1));
-    child.once('close', (code) => {
-      current = undefined;
-      resolve(code ?? 1);
-    });
-  });
+async function runNode(args: readonly string[], env: Env): Promise<number> {
+  const { code } = await runToEnd(args, { env, output: 'show' });
+  return code;
 }

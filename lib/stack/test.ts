@@ -4,7 +4,7 @@ import { findChromium } from './chromium';
 import { stackSettings } from './settings';
 import { Stack } from './stack';
 import { sum, type Tally } from './tally';
-import { endCurrentPhase, type Phase, PHASES } from './test-phases';
+import { type Phase, PHASES } from './test-phases';
 
 const report = (line: string) => console.log(line);
 /** Named ones only, or all of them: `npm test -- unit services`. */
@@ -13,7 +13,9 @@ const wanted = process.argv.slice(2);
 async function main(): Promise<void> {
   const unknown = wanted.filter((name) => !PHASES.some((phase) => phase.name === name));
   if (unknown.length > 0) {
-    console.error(`There is no ${unknown.join(', ')}; there are ${PHASES.map(({ name }) => name).join(', ')}.`);
+    console.error(
+      `There is no ${unknown.join(', ')}; there are ${PHASES.map(({ name }) => name).join(', ')}.`,
+    );
     process.exit(1);
   }
   const phases = PHASES.filter(({ name }) => wanted.length === 0 || wanted.includes(name));
@@ -89,7 +91,9 @@ async function openProduct(stack: Stack): Promise<void> {
 async function installChromium(): Promise<void> {
   if (findChromium() !== undefined || process.env['CHROMIUM_PATH'] !== undefined) return;
   if (process.getuid?.() !== 0) {
-    throw new CannotStart('Chromium is not on this machine: install it (on Debian: sudo apt-get install chromium).');
+    throw new CannotStart(
+      'Chromium is not on this machine: install it (on Debian: sudo apt-get install chromium).',
+    );
   }
   report('Installing Chromium with apt-get …');
   await runApt(['update', '-qq']);
@@ -98,12 +102,15 @@ async function installChromium(): Promise<void> {
 
 function endOnSignals(stack: Stack): void {
   let isEnding = false;
-  for (const [signal, code] of [['SIGINT', 130], ['SIGTERM', 143], ['SIGHUP', 129]] as const) {
+  for (const [signal, code] of [
+    ['SIGINT', 130],
+    ['SIGTERM', 143],
+    ['SIGHUP', 129],
+  ] as const) {
     process.on(signal, () => {
       if (isEnding) return;
       isEnding = true;
       report('\nStopping …');
-      endCurrentPhase();
       void stack.stop().then(() => process.exit(code));
     });
   }
