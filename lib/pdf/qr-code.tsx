@@ -13,7 +13,7 @@ export function QrCode({ text, size }: { text: string; size: number }) {
 
 /** The dark squares of a code as one path, in units of a square. */
 export function qrPath(text: string): { width: number; path: string } {
-  const [drawn] = bwip.raw('qrcode', text, { eclevel: 'M' });
+  const [drawn] = bwip.raw('qrcode', text, 'eclevel=M');
   if (!drawn || !('pixs' in drawn)) throw new Error('no code was drawn');
   const { pixs, pixx } = drawn;
   const runs: string[] = [];
