@@ -1,4 +1,4 @@
-import { AWAY_PLACES } from '@/lib/stock/places';
+import type { AWAY_PLACES } from '@/lib/stock/places';
 
 /** Where the pieces of one line are while they are out of the shop's hands. */
 export interface AwayStanding {
