@@ -1,0 +1,42 @@
+import { format, parseISO } from 'date-fns';
+
+import type { TidelineBatch } from './contract';
+import { xOf, type Scale } from './scale';
+
+/** The thread from a batch to the assembly that waits for it, or the words that say it is too late for a thread. */
+export interface TagString {
+  fromX: number;
+  /** The knot, on the day of need; null where the need is before the end and only words are set. */
+  knotX: number | null;
+  labelX: number;
+  labelSide: 'right' | 'left';
+  name: string;
+  day: string;
+  tooLate: boolean;
+  endX: number;
+}
+
+const KNOT_PX = 3.5;
+const GAP_PX = 9;
+
+/** Set widths are measured once for the fonts in use; here an average per character is enough to keep labels apart. */
+export const widthOfText = (text: string, perCharacter: number): number => text.length * perCharacter;
+
+/**
+ * @param endX where the tag with its flag and words ends.
+ */
+export function stringOf(batch: TidelineBatch, endX: number, scale: Scale): TagString | null {
+  const { assembly } = batch;
+  if (!assembly?.neededOn) return null;
+  const name = assembly.name + (assembly.more > 0 ? ` and ${assembly.more} more` : '');
+  const day = format(parseISO(assembly.neededOn), 'd MMM');
+  const needX = xOf(scale, assembly.neededOn) + scale.dayPx / 2;
+  const labelWidth = widthOfText(name, 7.2) + widthOfText(day, 6.4) + GAP_PX;
+  const common = { fromX: endX, name, day };
+  if (needX < endX + GAP_PX) return { ...common, knotX: null, labelX: endX + GAP_PX, labelSide: 'right', tooLate: true, endX: endX + labelWidth + widthOfText('needed ', 6.4) + GAP_PX };
+
+  const knotX = Math.min(needX, scale.widthPx - KNOT_PX);
+  const right = knotX + GAP_PX;
+  if (right + labelWidth <= scale.widthPx) return { ...common, knotX, labelX: right, labelSide: 'right', tooLate: false, endX: right + labelWidth };
+  return { ...common, knotX, labelX: Math.max(endX + GAP_PX, knotX - GAP_PX - labelWidth), labelSide: 'left', tooLate: false, endX: knotX + KNOT_PX };
+}
