@@ -49,8 +49,9 @@ export const kindWords = (kind: FileKind): string => KINDS[kind].says;
 export const mediaTypeOf = (kind: FileKind): string => KINDS[kind].mediaType;
 const kindNames = Object.keys(KINDS) as FileKind[];
 
-/** For the browser's file chooser: `.pdf,.png,…`. */
-export const acceptedEndings = (purpose: FilePurpose): string => (TAKEN[purpose] ?? []).flatMap((kind) => KINDS[kind].endings.map((ending) => `.${ending}`)).join(',');
+/** For the browser's file chooser. A phone offers its camera only where a type of picture is named. */
+export const acceptedFiles = (purpose: FilePurpose): string =>
+  (TAKEN[purpose] ?? []).flatMap((kind) => [...KINDS[kind].endings.map((ending) => `.${ending}`), ...(KINDS[kind].mediaType.startsWith('image/') ? [KINDS[kind].mediaType] : [])]).join(',');
 
 /** The kind a stored media type stands for. */
 export const kindOfMediaType = (mediaType: string): FileKind | null => kindNames.find((kind) => KINDS[kind].mediaType === mediaType) ?? null;

@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 
 import { contentDisposition, safeFileName } from '@/lib/files/file-name';
-import { acceptedEndings, claimedKind, sizeWords } from '@/lib/files/kinds';
+import { acceptedFiles, claimedKind, sizeWords } from '@/lib/files/kinds';
 import { isWhatItSays, sniffKind } from '@/lib/files/sniff-kind';
 
 describe('the name of a file', () => {
@@ -41,7 +41,7 @@ describe('what a file says it is', () => {
   test('without an ending the browser is asked', () => expect(claimedKind({ purpose: 'photo', name: 'image', mediaType: 'image/jpeg', size: 1 })).toEqual({ kind: 'jpeg' }));
   test('a script is nothing we take', () => expect(claimedKind({ purpose: 'photo', name: 'x.svg', mediaType: 'image/png', size: 1 })).toHaveProperty('refusal'));
   test('nobody sends a traveller', () => expect(claimedKind({ purpose: 'traveller', name: 'x.pdf', mediaType: '', size: 1 })).toMatchObject({ refusal: expect.stringMatching(/made by Lotwright itself/) as string }));
-  test('the chooser offers the same kinds', () => expect(acceptedEndings('certificate')).toBe('.pdf,.png,.jpg,.jpeg,.tif,.tiff'));
+  test('the chooser offers the same kinds', () => expect(acceptedFiles('certificate')).toBe('.pdf,.png,image/png,.jpg,.jpeg,image/jpeg,.tif,.tiff,image/tiff'));
   test.each([[12, '12 bytes'], [240 * 1024, '240 KB'], [1.8 * 1024 * 1024, '1.8 MB']])('%i is said as %s', (bytes, words) => expect(sizeWords(bytes)).toBe(words));
 });
 
