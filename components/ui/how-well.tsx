@@ -11,7 +11,7 @@ const BARS = [
 export function HowWell({ quality, says = false }: { quality: ReadQuality; says?: boolean }) {
   return (
     <span className="inline-flex items-center gap-1.5 whitespace-nowrap">
-      <svg width="12" height="11" viewBox="0 0 12 11" aria-hidden="true">
+      <svg width="0.75rem" height="0.6875rem" viewBox="0 0 12 11" aria-hidden="true">
         {BARS.map(({ x, height }, index) => (
           <rect
             key={x}

@@ -41,6 +41,9 @@ const STAGE_SHAPES: Record<Stage, ReactNode> = {
   ),
 };
 
+/** Drawn in pixels, set in rem: marks grow with the text they stand beside. */
+export const inRem = (px: number) => `${px / 16}rem`;
+
 interface MarkProps {
   size?: number;
   className?: string;
@@ -49,7 +52,7 @@ interface MarkProps {
 /** Drawn on 14 units, in the ink of what stands around it. */
 export function StageMark({ stage, size = 13, className = '' }: MarkProps & { stage: Stage }) {
   return (
-    <svg width={size} height={size} viewBox="0 0 14 14" aria-hidden="true" className={`flex-none ${className}`}>
+    <svg width={inRem(size)} height={inRem(size)} viewBox="0 0 14 14" aria-hidden="true" className={`flex-none ${className}`}>
       {STAGE_SHAPES[stage]}
     </svg>
   );
@@ -91,7 +94,7 @@ const VERDICT_SHAPES: Record<Verdict, ReactNode> = {
 
 export function VerdictMark({ verdict, size = 15, className = '' }: MarkProps & { verdict: Verdict }) {
   return (
-    <svg width={size} height={size} viewBox="0 0 16 16" aria-hidden="true" className={`flex-none ${className}`}>
+    <svg width={inRem(size)} height={inRem(size)} viewBox="0 0 16 16" aria-hidden="true" className={`flex-none ${className}`}>
       {VERDICT_SHAPES[verdict]}
     </svg>
   );
@@ -103,8 +106,8 @@ export function CheckMark({ level, size = 18, className = '' }: MarkProps & { le
   const tone = { stop: 'text-held-ink', warn: 'text-dispatched-ink', note: 'text-settled-ink' }[level];
   return (
     <svg
-      width={size}
-      height={size}
+      width={inRem(size)}
+      height={inRem(size)}
       viewBox={level === 'stop' ? '0 0 14 14' : '0 0 18 18'}
       aria-hidden="true"
       className={`flex-none ${tone} ${className}`}
@@ -130,8 +133,8 @@ export function CheckMark({ level, size = 18, className = '' }: MarkProps & { le
 export function BrandMark({ height = 22, className = '' }: { height?: number; className?: string }) {
   return (
     <svg
-      width={(height * 34) / 22}
-      height={height}
+      width={inRem((height * 34) / 22)}
+      height={inRem(height)}
       viewBox="0 0 34 22"
       aria-hidden="true"
       className={`flex-none ${className}`}

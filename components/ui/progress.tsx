@@ -1,3 +1,5 @@
+import { inRem } from './marks';
+
 interface ProgressProps {
   /** "Reading the certificate", "Sending 26-04177.pdf" */
   says: string;
@@ -17,8 +19,8 @@ export function Progress({ says, value, of, where }: ProgressProps) {
     <div className="flex flex-wrap items-center gap-3.5 py-1">
       <strong>{says}</strong>
       <svg
-        width={WIDTH}
-        height="14"
+        width={inRem(WIDTH)}
+        height={inRem(14)}
         viewBox={`0 0 ${WIDTH} 14`}
         role="progressbar"
         aria-label={says}

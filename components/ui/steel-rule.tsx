@@ -1,3 +1,5 @@
+import { inRem } from './marks';
+
 export interface RuleMark {
   at: number;
   tone?: 'ink' | 'held' | 'proved' | undefined;
@@ -42,8 +44,8 @@ export function SteelRule(props: SteelRuleProps) {
 
   return (
     <svg
-      width={width}
-      height={line + (small ? 2 : 17)}
+      width={inRem(width)}
+      height={inRem(line + (small ? 2 : 17))}
       viewBox={`0 0 ${width} ${line + (small ? 2 : 17)}`}
       role="img"
       aria-label={says}
