@@ -28,7 +28,7 @@ export function DispatchMail(props: Props) {
       <Lines {...props} />
       {url && <Actions primary={{ says: changes ? 'Look at what changed' : 'Say you have them, promise a day', url }} second={{ says: 'Ask', url: `${url}?at=ask` }} />}
       <p style={{ margin: '14px 0 0', fontSize: 14, lineHeight: '20px' }}>
-        {url ? 'No password is needed; the link is yours and ends when the batch is settled. Traveller and purchase order are on its page.' : 'Sign in to see the batch and its papers.'}
+        {url ? 'No password is needed; the link is yours and ends when the batch is settled. Traveller and purchase order are on its page too.' : 'Sign in to see the batch and its papers.'}
       </p>
       <Caution>
         {cautions.map((caution) => `${caution.replace(/\.?$/, '.')} `)}
@@ -68,9 +68,10 @@ function Lines({ lines, pieces }: Props) {
   );
 }
 
-function Foot({ shop, url }: Props) {
+function Foot({ shop, url, attached }: Props) {
   return (
     <>
+      {attached.length > 0 && `Attached: ${attached.join(', ')}. `}
       The drawing, the order and the governing specification come first. <AnswerFoot shop={shop} hasPage={url !== null} />
     </>
   );

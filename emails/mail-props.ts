@@ -48,6 +48,8 @@ const Dispatch = OfBatch.extend({
   /** The processor's page of this batch; null where the shop has withdrawn its links. */
   url: z.url().nullable(),
   version: z.int().positive(),
+  /** Names of the files that go along. */
+  attached: z.array(Words).default([]),
 });
 
 const Message = OfBatch.extend({

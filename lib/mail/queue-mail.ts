@@ -12,6 +12,8 @@ interface MailToQueue<T extends MailTemplate> {
   props: MailGiven<T>;
   /** Who reads an answer to this mail. Left out: whoever of the shop causes it, else its first admin. */
   replyTo?: string | null;
+  /** Ids of verified files of the shop. */
+  attach?: readonly string[];
 }
 
 /**
@@ -27,6 +29,7 @@ export async function queueMail<T extends MailTemplate>(ctx: Pick<Ctx, 'tx' | 't
     template: mail.template,
     to: [mail.to].flat(),
     replyTo,
+    attach: [...(mail.attach ?? [])],
     props: MAIL_PROPS[mail.template].parse(mail.props) as Record<string, unknown>,
   });
 }

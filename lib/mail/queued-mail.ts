@@ -13,6 +13,8 @@ export const QueuedMail = z.object({
   template: z.enum(TEMPLATES),
   to: z.array(z.email()).min(1),
   replyTo: z.email().nullable(),
+  /** Kept files of the shop that go along. */
+  attach: z.array(z.uuid()).default([]),
   props: z.record(z.string(), z.unknown()),
 });
 export type QueuedMail = z.output<typeof QueuedMail>;

@@ -5,8 +5,3 @@ export function askedWords(process: Process, conditions: readonly (string | null
   const [only, ...others] = [...new Set(conditions)];
   return only && others.length === 0 ? `${PROCESS_WORDS[process]} to ${only}` : PROCESS_WORDS[process];
 }
-
-/** `AMS 2770R, class 1` */
-export function specificationWords(of: { specification: string; specificationRevision: string | null; classType: string | null }): string {
-  return [`${of.specification}${of.specificationRevision ?? ''}`, of.classType].filter(Boolean).join(', ');
-}

@@ -4,9 +4,10 @@ import { batches, batchLines } from '@/db/schema/batches';
 import { processors, shopProcessors, shops } from '@/db/schema/organisations';
 import { users } from '@/db/schema/people';
 import type { Ctx } from '@/lib/auth/context';
+import { specificationWords } from '@/lib/batches/step-asked';
 import { notFound } from '@/lib/errors';
 
-import { askedWords, specificationWords } from './asked-words';
+import { askedWords } from './asked-words';
 
 /** All that mails say of a batch, read in the shop. */
 export async function batchForMail(ctx: Ctx, batchId: string) {
