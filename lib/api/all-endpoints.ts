@@ -3,6 +3,7 @@ import * as batches from '@/lib/batches/endpoints';
 import * as certificates from '@/lib/certificates/endpoints';
 import * as files from '@/lib/files/endpoints';
 import * as nonconformances from '@/lib/nonconformances/endpoints';
+import * as people from '@/lib/people/endpoints';
 import * as receipts from '@/lib/receipts/endpoints';
 import * as search from '@/lib/search/endpoints';
 import * as session from '@/lib/session/endpoints';
@@ -11,4 +12,4 @@ import * as tideline from '@/lib/tideline/endpoints';
 import type { Endpoint } from './endpoint';
 
 /** Every read and write there is: what the documentation and the walk over all permissions go by. */
-export const ALL_ENDPOINTS: readonly Endpoint[] = [audit, batches, certificates, files, nonconformances, receipts, search, session, tideline].flatMap((domain) => Object.values(domain) as unknown as Endpoint[]);
+export const ALL_ENDPOINTS: readonly Endpoint[] = [audit, batches, certificates, files, nonconformances, people, receipts, search, session, tideline].flatMap((domain) => Object.values(domain) as unknown as Endpoint[]);

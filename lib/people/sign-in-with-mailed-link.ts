@@ -5,7 +5,7 @@ import { mailedLinks, memberships, users } from '@/db/schema/people';
 import { hashToken } from '@/lib/auth/identify';
 import type { SessionClaims } from '@/lib/auth/session-claims';
 
-import { claimsOf } from './sign-in-with-password';
+import { claimsFor } from './claims-for';
 
 /** Uses up a single-use link. Two presses at once: the condition on `used_at` lets one of them win. */
 export function signInWithMailedLink(db: Db, { token, now }: { token: string; now: Date }): Promise<SessionClaims | null> {
@@ -21,7 +21,8 @@ export function signInWithMailedLink(db: Db, { token, now }: { token: string; no
       .from(users)
       .innerJoin(memberships, and(eq(memberships.userId, users.id), eq(memberships.active, true)))
       .where(and(eq(users.id, link.userId), eq(users.active, true)))
+      .orderBy(memberships.id)
       .limit(1);
-    return user ? claimsOf(user) : null;
+    return user ? claimsFor(user) : null;
   });
 }
