@@ -58,7 +58,7 @@ function table(messages: readonly StoredMessage[]): string {
 <td>${message.recipients.map((to) => `<a href="/?to=${encodeURIComponent(to)}">${escapeHtml(to)}</a>`).join('<br>')}</td>
 <td class="narrow-off quiet">${escapeHtml(message.from)}</td>
 <td class="narrow-off right mono">${message.attachments.length || ''}</td>
-<td class="mono">${escapeHtml(readableTime(message.receivedAt))}</td>
+<td class="mono keep">${escapeHtml(readableTime(message.receivedAt))}</td>
 </tr>`,
   );
   return `<table><thead><tr><th>Subject</th><th>To</th><th class="narrow-off">From</th><th class="narrow-off right">Files</th><th>Received</th></tr></thead><tbody>${rows.join('')}</tbody></table>`;
@@ -76,5 +76,5 @@ function emptySentence(to: string): string {
 }
 
 function readableTime(iso: string): string {
-  return `${iso.slice(0, 10)} ${iso.slice(11, 19)} UTC`;
+  return `${iso.slice(0, 10)} ${iso.slice(11, 16)} UTC`;
 }

@@ -9,7 +9,7 @@ export function overviewPage(world: PaymentsWorld): string {
   const { state } = world.store;
   const underWay = Object.keys(state.settlements).length;
   const waiting = state.deliveries.filter((delivery) => delivery.state === 'waiting').length;
-  const body = `<h1>Payments</h1>
+  const body = `<h1>Payments of this installation</h1>
 <p class="quiet">Amounts ending in .13 are declined, in .17 succeed after a while, in .19 fail after a while; bank accounts always take a while. ${underWay} under way, ${waiting} ${waiting === 1 ? 'message' : 'messages'} waiting to be delivered${world.isHoldingWebhooks() ? ' (held back)' : ''}.</p>
 <div>
 ${button('/control/settle', {}, 'Settle all under way now')}
@@ -28,14 +28,14 @@ function intentTable({ store: { state } }: PaymentsWorld): string {
   const rows = intents.map(
     (intent) => `<tr>
 <td class="mono">${escapeHtml(intent.id)}</td>
-<td class="right mono">${amountOf(intent)}</td>
+<td class="right mono keep">${amountOf(intent)}</td>
 <td>${statusOf(intent)}${intent.last_payment_error ? `<br><span class="caption">${escapeHtml(intent.last_payment_error.message)}</span>` : ''}</td>
 <td class="narrow-off">${escapeHtml(accountName(state.accounts, intent.transfer_data?.destination))}</td>
 <td class="narrow-off caption">${escapeHtml(Object.entries(intent.metadata).map(([key, value]) => `${key} ${value}`).join(', '))}</td>
-<td class="mono">${timeOf(intent.created)}</td>
+<td class="mono keep">${timeOf(intent.created)}</td>
 <td>${intent.status === 'processing' ? settleButtons(intent) : ''}</td></tr>`,
   );
-  return `<table><thead><tr><th>Payment</th><th class="right">Amount</th><th>Now</th><th class="narrow-off">To</th><th class="narrow-off">Note</th><th>Made</th><th></th></tr></thead><tbody>${rows.join('')}</tbody></table>`;
+  return `<table><thead><tr><th>Payment</th><th class="right">Amount</th><th>Now</th><th class="narrow-off">To</th><th class="narrow-off">Note</th><th>Made</th><th>End it</th></tr></thead><tbody>${rows.join('')}</tbody></table>`;
 }
 
 function deliveryTable({ store: { state } }: PaymentsWorld): string {
@@ -48,10 +48,10 @@ function deliveryTable({ store: { state } }: PaymentsWorld): string {
 <td class="mono narrow-off">${escapeHtml(delivery.event)}</td>
 <td class="${delivery.state === 'delivered' ? 'ok' : 'quiet'}">${delivery.state.replace('_', ' ')}</td>
 <td class="mono">${delivery.attempts} × ${escapeHtml(delivery.lastAnswer ?? 'not sent')}</td>
-<td class="mono">${timeOf(event?.created ?? 0)}</td>
+<td class="mono keep">${timeOf(event?.created ?? 0)}</td>
 <td>${button('/control/redeliver', { event: delivery.event }, 'Send again')}</td></tr>`;
   });
-  return `<table><thead><tr><th>What happened</th><th class="narrow-off">Message</th><th>State</th><th>Answer</th><th>When</th><th></th></tr></thead><tbody>${rows.join('')}</tbody></table>`;
+  return `<table><thead><tr><th>What happened</th><th class="narrow-off">Message</th><th>State</th><th>Answer</th><th>When</th><th>Repeat</th></tr></thead><tbody>${rows.join('')}</tbody></table>`;
 }
 
 function accountTable({ store: { state } }: PaymentsWorld): string {

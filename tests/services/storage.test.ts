@@ -119,7 +119,7 @@ describe('an upload straight from the browser', () => {
       sending.on('error', () => resolve());
       sending.write(Buffer.alloc(200_000), () => setTimeout(() => sending.destroy(new Error('cut')), 50));
     });
-    await expect.poll(async () => (await readdir(dir, { recursive: true })).filter((name) => name.endsWith('.partial'))).toEqual([]);
+    await expect.poll(async () => (await readdir(dir, { recursive: true })).filter((name) => name.endsWith('.partial')), { timeout: 20_000 }).toEqual([]);
     expect(await headObject(key, storage)).toBeNull();
   });
 });
@@ -172,6 +172,16 @@ describe('a storage in trouble', () => {
     await fail('drop');
     await expect(headObject('any', storage)).rejects.toMatchObject({ code: 'unavailable' });
     await expect(announce()).resolves.toMatchObject({ method: 'PUT' });
+  });
+
+  test('that breaks off in the middle of an upload keeps nothing, and takes it the next time', async () => {
+    const key = newKey();
+    const signed = await announce({ key });
+    await fail('cut');
+    await expect(upload(signed)).rejects.toThrow();
+    await fail('none');
+    expect(await headObject(key, storage)).toBeNull();
+    expect((await upload(signed)).status).toBe(200);
   });
 
   test('is seen by the readiness check, and so is a missing bucket', async () => {
