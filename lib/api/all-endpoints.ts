@@ -1,3 +1,4 @@
+import * as assemblies from '@/lib/assemblies/endpoints';
 import * as audit from '@/lib/audit/endpoints';
 import * as batches from '@/lib/batches/endpoints';
 import * as certificates from '@/lib/certificates/endpoints';
@@ -7,9 +8,10 @@ import * as people from '@/lib/people/endpoints';
 import * as receipts from '@/lib/receipts/endpoints';
 import * as search from '@/lib/search/endpoints';
 import * as session from '@/lib/session/endpoints';
+import * as stock from '@/lib/stock/endpoints';
 import * as tideline from '@/lib/tideline/endpoints';
 
 import type { Endpoint } from './endpoint';
 
 /** Every read and write there is: what the documentation and the walk over all permissions go by. */
-export const ALL_ENDPOINTS: readonly Endpoint[] = [audit, batches, certificates, files, nonconformances, people, receipts, search, session, tideline].flatMap((domain) => Object.values(domain) as unknown as Endpoint[]);
+export const ALL_ENDPOINTS: readonly Endpoint[] = [assemblies, audit, batches, certificates, files, nonconformances, people, receipts, search, session, stock, tideline].flatMap((domain) => Object.values(domain) as unknown as Endpoint[]);

@@ -61,7 +61,8 @@ export async function readStock(ctx: Pick<Ctx, 'tx'>): Promise<Map<string, numbe
   return new Map(rows.map((row) => [row.number, row.pieces]));
 }
 
-async function readWaits(ctx: Pick<Ctx, 'tx'>): Promise<(BatchWait & { partNumber: string })[]> {
+/** Batches on their way that carry a part some open assembly needs, soonest promise first. */
+export async function readWaits(ctx: Pick<Ctx, 'tx'>): Promise<(BatchWait & { partNumber: string })[]> {
   const { rows } = await ctx.tx.execute<BatchWait & { partNumber: string } & Record<string, unknown>>(sql`
     select b.id, b.number, b.stage, sum(l.pieces)::int as pieces, b.promised_on::text as "promisedOn", p.number as "partNumber"
     from batches b join batch_lines l on l.batch_id = b.id join lots o on o.id = l.lot_id join parts p on p.id = o.part_id

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { closeAssemblyEndpoint } from '@/lib/assemblies/endpoints';
+
+export const POST = serve(closeAssemblyEndpoint);

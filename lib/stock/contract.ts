@@ -1,0 +1,150 @@
+import { z } from 'zod';
+
+import { declare } from '@/lib/api/endpoint';
+import { Done, Id, Moment, PageQuery, pageOf, Pieces } from '@/lib/api/shapes';
+import { STAGES } from '@/lib/batches/stage';
+
+export const Location = z.object({ id: Id, name: z.string(), pieces: z.int(), closed: z.boolean() });
+export type Location = z.output<typeof Location>;
+
+export const listLocations = declare({
+  id: 'listLocations',
+  method: 'get',
+  path: '/stock/locations',
+  summary: 'Shelves, bins and racks, with what lies in each',
+  side: 'shop',
+  permission: 'stock.read',
+  input: z.object({}),
+  response: z.object({ rows: z.array(Location) }),
+});
+
+export const addLocation = declare({
+  id: 'addLocation',
+  method: 'post',
+  path: '/stock/locations',
+  summary: 'Name a place in the stores',
+  side: 'shop',
+  permission: 'stock.release',
+  input: z.object({ name: z.string().trim().min(1, 'Give the place a name.').max(60, 'Write 60 characters or less.') }),
+  response: z.object({ id: Id }),
+});
+
+export const StockRow = z.object({
+  lotId: Id,
+  lotNumber: z.string(),
+  heat: z.string(),
+  partId: Id,
+  partNumber: z.string(),
+  partRevision: z.string(),
+  partName: z.string(),
+  condition: z.string(),
+  locationId: Id,
+  location: z.string(),
+  pieces: z.int(),
+});
+export type StockRow = z.output<typeof StockRow>;
+
+export const listStock = declare({
+  id: 'listStock',
+  method: 'get',
+  path: '/stock',
+  summary: 'Released pieces by part, lot and place',
+  side: 'shop',
+  permission: 'stock.read',
+  input: PageQuery.extend({ locationId: Id.optional(), part: z.string().trim().max(80).optional() }),
+  response: pageOf(StockRow),
+});
+
+export const GateLine = z.object({
+  lineId: Id,
+  lineNo: z.int(),
+  lotId: Id,
+  lotNumber: z.string(),
+  partNumber: z.string(),
+  partRevision: z.string(),
+  partName: z.string(),
+  pieces: z.int(),
+  released: z.int(),
+  mayPass: z.int(),
+  nextProcess: z.string().nullable(),
+  missing: z.array(z.object({ reason: z.enum(['nothing_back', 'not_proved', 'on_hold', 'not_paid', 'still_away']), pieces: z.int(), detail: z.array(z.string()) })),
+});
+export type GateLine = z.output<typeof GateLine>;
+
+export const getGate = declare({
+  id: 'getGate',
+  method: 'get',
+  path: '/batches/{batchId}/gate',
+  summary: 'What may be released of a batch now, and what is still missing',
+  side: 'shop',
+  permission: 'stock.read',
+  input: z.object({ batchId: Id }),
+  response: z.object({ batchId: Id, number: z.string(), stage: z.enum(STAGES), processor: z.string(), lines: z.array(GateLine), locations: z.array(Location), assemblies: z.array(z.object({ name: z.string(), ready: z.int(), needed: z.int() })) }),
+});
+
+export const releasePieces = declare({
+  id: 'releasePieces',
+  method: 'post',
+  path: '/batches/{batchId}/release',
+  summary: 'Release proved pieces to a stock place, or on to their next outside step',
+  side: 'shop',
+  permission: 'stock.release',
+  input: z.object({
+    batchId: Id,
+    lines: z
+      .array(z.object({ lineId: Id, pieces: Pieces, locationId: Id.nullable() }))
+      .min(1, 'Choose at least one line to release.')
+      .max(500),
+  }),
+  response: z.object({ releases: z.array(z.object({ id: Id, lineId: Id, pieces: z.int() })) }),
+});
+
+export const Release = z.object({
+  id: Id,
+  lotId: Id,
+  lotNumber: z.string(),
+  heat: z.string(),
+  partNumber: z.string(),
+  partRevision: z.string(),
+  partName: z.string(),
+  condition: z.string(),
+  pieces: z.int(),
+  location: z.string().nullable(),
+  batchNumber: z.string(),
+  releasedBy: z.string(),
+  releasedAt: Moment,
+});
+export type Release = z.output<typeof Release>;
+
+export const listReleases = declare({
+  id: 'listReleases',
+  method: 'get',
+  path: '/batches/{batchId}/releases',
+  summary: 'What was released of a batch: one label each',
+  side: 'shop',
+  permission: 'stock.read',
+  input: z.object({ batchId: Id }),
+  response: z.object({ rows: z.array(Release) }),
+});
+
+export const fitPieces = declare({
+  id: 'fitPieces',
+  method: 'post',
+  path: '/stock/fit',
+  summary: 'Issue pieces from a stock place to an assembly',
+  side: 'shop',
+  permission: 'stock.fit',
+  input: z.object({ lotId: Id, locationId: Id, assemblyId: Id, pieces: Pieces }),
+  response: Done,
+});
+
+export const moveStock = declare({
+  id: 'moveStock',
+  method: 'post',
+  path: '/stock/move',
+  summary: 'Move pieces from one stock place to another',
+  side: 'shop',
+  permission: 'stock.release',
+  input: z.object({ lotId: Id, fromLocationId: Id, toLocationId: Id, pieces: Pieces }),
+  response: Done,
+});
