@@ -1,14 +1,17 @@
-import NextAuth from 'next-auth';
+import NextAuth, { CredentialsSignin } from 'next-auth';
 import Credentials from 'next-auth/providers/credentials';
 
 import { primary } from '@/db/pools';
 import type { SessionClaims } from '@/lib/auth/session-claims';
 import { env } from '@/lib/env';
+import { AppError } from '@/lib/errors';
+import { log } from '@/lib/log';
+import { chooseOrganisation } from '@/lib/people/choose-organisation';
 import { openBatchLink } from '@/lib/people/open-batch-link';
 import { signInWithMailedLink } from '@/lib/people/sign-in-with-mailed-link';
 import { signInWithPassword } from '@/lib/people/sign-in-with-password';
 
-import { secureCookies } from './session';
+import { claimsOf, secureCookies } from './session';
 
 declare module 'next-auth' {
   interface User {
@@ -19,8 +22,22 @@ declare module 'next-auth' {
 const text = (value: unknown): string => (typeof value === 'string' ? value : '');
 const addressOf = (request: Request): string => request.headers.get('x-forwarded-for')?.split(',')[0]?.trim() ?? 'local';
 
+/** Too many tries: the seconds to wait travel in the code, because the form's answer and the address carry nothing else. */
+class SignInThrottled extends CredentialsSignin {
+  constructor(refusal: AppError) {
+    super(refusal.message);
+    this.code = `wait-${String(refusal.details.extra?.['waitS'] ?? 900)}`;
+  }
+}
+
+async function throttled<T>(work: Promise<T>): Promise<T> {
+  return work.catch((error: unknown) => {
+    throw error instanceof AppError && error.code === 'too_many' ? new SignInThrottled(error) : error;
+  });
+}
+
 /**
- * The three ways in. Each answers with claims, which the signed cookie carries; what the claims are worth is decided
+ * The ways in. Each answers with claims, which the signed cookie carries; what the claims are worth is decided
  * with every request (lib/auth/identify.ts).
  */
 export const { handlers, signIn, signOut } = NextAuth({
@@ -34,7 +51,7 @@ export const { handlers, signIn, signOut } = NextAuth({
       id: 'password',
       credentials: { email: {}, password: {} },
       authorize: async ({ email, password }, request) => {
-        const claims = await signInWithPassword(primary(), { email: text(email), password: text(password), address: addressOf(request), now: new Date() });
+        const claims = await throttled(signInWithPassword(primary(), { email: text(email), password: text(password), address: addressOf(request) }));
         return claims && { id: 'person', claims };
       },
     }),
@@ -54,9 +71,23 @@ export const { handlers, signIn, signOut } = NextAuth({
         return claims && { id: 'link', claims };
       },
     }),
+    // For somebody who is in already and works for another organisation too.
+    Credentials({
+      id: 'organisation',
+      credentials: { membershipId: {} },
+      authorize: async ({ membershipId }, request) => {
+        const claims = await chooseOrganisation(primary(), { now: await claimsOf(request.headers), membershipId: text(membershipId) });
+        return claims && { id: 'person', claims };
+      },
+    }),
   ],
   callbacks: {
     jwt: ({ token, user }) => ({ ...token, ...(user ? { claims: user.claims } : {}) }),
     session: ({ session }) => session,
+  },
+  logger: {
+    error: (error) => (error instanceof CredentialsSignin ? log.info({ reason: error.code }, 'sign-in refused') : log.error({ error }, 'sign-in failed')),
+    warn: (code) => log.warn({ code }, 'sign-in'),
+    debug: () => undefined,
   },
 });

@@ -46,10 +46,10 @@ async function waitOf(limit: RateLimiterPostgres, whose: string): Promise<number
 }
 
 /** After a right password: the account starts anew, the address gets its try back. */
-export async function giveBackTry(db: Db, what: Throttled, { email, address }: Trier): Promise<void> {
+export async function giveBackTry(db: Db | Tx, what: Throttled, { email, address }: Trier): Promise<void> {
   await limiter(db, what, 'account').delete(keyOf(email));
   await limiter(db, what, 'address').reward(keyOf(address));
-  await withTenant(db, { kind: 'door' }, (tx) => tx.delete(throttles).where(lt(throttles.expire, Date.now())));
+  if (!('rollback' in db)) await withTenant(db, { kind: 'door' }, (tx) => tx.delete(throttles).where(lt(throttles.expire, Date.now())));
 }
 
 function tooMany(what: Throttled, waitMs: number): AppError {
