@@ -40,5 +40,7 @@ async function earlierAnswer(tx: Tx, request: KeyedRequest): Promise<unknown> {
   if (earlier?.operation !== request.operation || earlier.requestHash !== request.requestHash) {
     throw new AppError('conflict', 'This key was used for another request. Use a new key for a new request.');
   }
+  // A file, or a secret that is shown once, is not kept to be told again.
+  if (earlier.status === null) throw new AppError('conflict', 'This was done already. Its answer is shown only once and is not kept.');
   return earlier.response;
 }

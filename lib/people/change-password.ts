@@ -2,34 +2,41 @@ import { eq, sql } from 'drizzle-orm';
 import type { z } from 'zod';
 
 import { users } from '@/db/schema/people';
+import type { Outside } from '@/lib/api/endpoint';
 import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
-import { hashPassword, isPassword } from '@/lib/auth/passwords';
+import { hashPassword } from '@/lib/auth/passwords';
 import { AppError, notFound } from '@/lib/errors';
 
 import type { changePassword as declaration } from './account-contract';
 import { meAtTheDoor } from './my-account';
 import { recordForPerson } from './record-for-person';
-import { takeTry } from './throttle';
+import { tryPasswordAgain } from './try-password-again';
 
-/** Who knows the password may choose another; a stolen open screen alone may not. Ends every session, this one too. */
-export async function changePassword(ctx: Ctx, { current, password }: z.output<(typeof declaration)['input']>) {
+/**
+ * Who knows the password may choose another (`proveCurrentPassword` asks for it first); an open screen alone may not. Ends
+ * every session, this one too.
+ */
+export async function changePassword(ctx: Ctx, { password }: z.output<(typeof declaration)['input']>) {
   authorize(ctx, 'self.manage');
   const me = meAtTheDoor(ctx);
-  const [user] = await ctx.tx.select({ name: users.name, email: users.email, passwordHash: users.passwordHash }).from(users).where(eq(users.id, me)).for('update');
-  if (!user) throw notFound('person');
-  if (user.passwordHash === null) throw new AppError('bad_input', 'You have no password yet. Ask for a link to choose one; it comes by mail.');
-  await takeTry(ctx.tx, 'sign_in', { email: user.email, address: ctx.address ?? 'local' });
-  if (!(await isPassword(user.passwordHash, current))) {
-    throw new AppError('bad_input', 'The password you have now is another one.', { fields: [{ field: 'current', message: 'This is not the password you have now.' }] });
-  }
-  refuseGuessable(password, user.email);
-  await ctx.tx
+  const [user] = await ctx.tx
     .update(users)
     .set({ passwordHash: await hashPassword(password), sessionVersion: sql`${users.sessionVersion} + 1` })
-    .where(eq(users.id, me));
+    .where(eq(users.id, me))
+    .returning({ name: users.name, email: users.email });
+  if (!user) throw notFound('person');
+  refuseGuessable(password, user.email);
   await recordForPerson(ctx, { id: me, name: user.name }, { action: 'person.change_password' });
   return { email: user.email };
+}
+
+/** Before the transaction, so that a wrong try counts although everything else is rolled back. */
+export async function proveCurrentPassword(outside: Outside, { current }: { current: string }): Promise<void> {
+  await tryPasswordAgain(outside, { password: current }).catch((error: unknown) => {
+    if (!(error instanceof AppError) || error.code !== 'bad_input') throw error;
+    throw new AppError('bad_input', 'The password you have now is another one.', { fields: [{ field: 'current', message: 'This is not the password you have now. Type it again.' }] });
+  });
 }
 
 /** The first thing a stranger tries. */

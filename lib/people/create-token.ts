@@ -36,5 +36,6 @@ export async function createToken(ctx: Ctx, { name, scopes, lastDay }: z.output<
     createdAt: ctx.now,
   });
   await recordAudit(ctx, { action: 'token.create', entity: 'token', entityId: id, after: { name, scopes, lastDay } });
-  return { id, token };
+  // A web answer of its own: the answer to a repeat is otherwise kept in the database, and this one must not be.
+  return Response.json({ id, token }, { headers: { 'cache-control': 'no-store' } });
 }

@@ -1,9 +1,9 @@
-import { endpoint } from '@/lib/api/endpoint';
+import { endpoint, endpointInSteps } from '@/lib/api/endpoint';
 
 import { acceptInvitation, readInvitation } from './accept-invitation';
 import * as account from './account-contract';
 import { changeRoles, setPersonActive } from './change-member';
-import { changePassword } from './change-password';
+import { changePassword, proveCurrentPassword } from './change-password';
 import { createToken } from './create-token';
 import { endMySessions } from './end-my-sessions';
 import { invitePerson, renewInvitation, withdrawInvitation } from './invite-person';
@@ -19,7 +19,7 @@ import { listTokens } from './tokens';
 
 export const getAccountEndpoint = endpoint(account.getAccount, getAccount);
 export const updateAccountEndpoint = endpoint(account.updateAccount, updateAccount);
-export const changePasswordEndpoint = endpoint(account.changePassword, changePassword);
+export const changePasswordEndpoint = endpointInSteps(account.changePassword, { outside: proveCurrentPassword, run: changePassword });
 export const endMySessionsEndpoint = endpoint(account.endMySessions, endMySessions);
 export const requestSignInLinkEndpoint = endpoint(account.requestSignInLink, requestSignInLink);
 export const requestResetEndpoint = endpoint(account.requestReset, requestReset);
