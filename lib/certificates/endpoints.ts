@@ -1,4 +1,5 @@
-import { endpoint } from '@/lib/api/endpoint';
+import { endpoint, endpointInSteps } from '@/lib/api/endpoint';
+import { tryPasswordAgain } from '@/lib/people/try-password-again';
 
 import { addCertificate } from './add-certificate';
 import * as contract from './contract';
@@ -17,4 +18,4 @@ export const recordCertificateEndpoint = endpoint(contract.recordCertificate, re
 export const decideRequirementEndpoint = endpoint(contract.decideRequirement, decideRequirement);
 export const setAsideCertificateEndpoint = endpoint(contract.setAsideCertificate, setAsideCertificate);
 export const takeUpCertificateEndpoint = endpoint(contract.takeUpCertificate, takeUpCertificate);
-export const signCertificateEndpoint = endpoint(contract.signCertificate, signCertificate);
+export const signCertificateEndpoint = endpointInSteps(contract.signCertificate, { outside: tryPasswordAgain, run: signCertificate });

@@ -6,13 +6,16 @@ import { certificates, coverage, signatures } from '@/db/schema/evidence';
 import { shops } from '@/db/schema/organisations';
 import { getCertificate } from '@/lib/certificates/get-certificate';
 import { sealOf } from '@/lib/certificates/seal';
+import { signCertificateEndpoint } from '@/lib/certificates/endpoints';
 import { signCertificate } from '@/lib/certificates/sign-certificate';
 import { decideRequirement } from '@/lib/certificates/decide-requirement';
+import type { Endpoint } from '@/lib/api/endpoint';
 import { newId } from '@/lib/ids';
 
 import { makeDispatchedBatch } from '../../factories/batches';
 import { countInAll, decideAll, givePassword, makeCertificate, makeFile, makeSignedCertificate, signingInput } from '../../factories/evidence';
 import { lastAudit, stageNow } from '../../factories/standing';
+import { inSteps } from '../../factories/uploads';
 import { makeWorld } from '../../factories/world';
 import { openDatabase } from '../open-database';
 
@@ -77,6 +80,15 @@ test('a wrong password signs nothing', async () => {
     await expect(signCertificate(ctx, { ...(await signingInput(ctx, certificateId, [10])), password: 'guessed' })).rejects.toMatchObject({ code: 'bad_input', details: { fields: [{ field: 'password' }] } });
     expect(await ctx.tx.select().from(signatures)).toEqual([]);
   });
+});
+
+test('guessing the password of a signature ends after some tries, right ones do not count', async () => {
+  const { world, certificateId } = await setup();
+  const input = await world.as(['inspector'], (ctx) => signingInput(ctx, certificateId, [11]));
+  const sign = (password: string) => inSteps((work) => world.as(['inspector'], work), signCertificateEndpoint as unknown as Endpoint, { ...input, password });
+  for (let times = 0; times < 10; times += 1) await expect(sign(input.password)).rejects.toMatchObject({ code: 'bad_input', message: expect.stringContaining('Enter 10 or less') as string });
+  for (let times = 0; times < 8; times += 1) await expect(sign('guessed')).rejects.toMatchObject({ code: 'bad_input' });
+  await expect(sign('guessed')).rejects.toMatchObject({ code: 'too_many' });
 });
 
 test('a person without a password cannot sign, nor can a program with a token', async () => {

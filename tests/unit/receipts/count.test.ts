@@ -44,7 +44,7 @@ describe('a count', () => {
 
   test('never lets in more good and damaged pieces than are away', () =>
     fc.assert(
-      fc.property(fc.nat(30), fc.nat(30), fc.nat(30), fc.nat(30), fc.nat(30), (away, good, damaged, short, over) => {
+      fc.property(fc.record({ away: fc.nat(30), good: fc.nat(30), damaged: fc.nat(30), short: fc.nat(30), over: fc.nat(30) }), ({ away, good, damaged, short, over }) => {
         const accepted = faultsOf({ good, damaged, short, over }, { away }).length === 0;
         if (accepted) expect(good + damaged + short).toBeLessThanOrEqual(away);
         if (good + damaged > away) expect(accepted).toBe(false);
