@@ -47,7 +47,7 @@ p{margin:8px 0;max-width:70ch}
 a{color:var(--ink);text-underline-offset:2px}
 :focus-visible{outline:2px solid var(--ink);outline-offset:2px;box-shadow:0 0 0 4px var(--halo)}
 table{width:100%;border-collapse:collapse}
-th{text-align:left;padding:6px 12px 6px 0;border-bottom:1px solid var(--ink)}
+th{text-align:left;white-space:nowrap;padding:6px 12px 6px 0;border-bottom:1px solid var(--ink)}
 td{padding:8px 12px 8px 0;border-bottom:1px solid var(--rule);vertical-align:top;overflow-wrap:anywhere}
 tbody tr:hover td{background:var(--bench)}
 code,.mono{font-family:"Spline Sans Mono",ui-monospace,Menlo,Consolas,monospace;font-size:13px;font-variant-numeric:tabular-nums}
@@ -59,7 +59,7 @@ nav a{padding:6px 0;text-decoration:none}nav a[aria-current]{font-weight:600;bor
 form.inline{display:inline}form.row{display:flex;gap:12px;align-items:end;flex-wrap:wrap;margin:12px 0}
 form.stack{display:grid;gap:16px;max-width:420px;margin:24px 0}
 label{display:grid;gap:4px;font-size:14.5px;font-weight:600}
-input,select{font:inherit;font-weight:400;color:var(--ink);background:var(--field);border:1px solid var(--line);border-radius:0;padding:7px 8px;min-height:36px}
+input,select{font:400 14.5px/20px Barlow,"Segoe UI",system-ui,sans-serif;color:var(--ink);background:var(--field);border:1px solid var(--line);border-radius:0;padding:7px 8px;min-height:36px}
 button{font:inherit;font-weight:600;color:var(--ink);background:transparent;border:1px solid var(--line);border-radius:0;padding:6px 12px;cursor:pointer}
 button.primary{background:var(--ink);color:var(--paper);border-color:var(--ink);padding:10px 20px;clip-path:polygon(9px 0,100% 0,100% 100%,9px 100%,0 calc(100% - 9px),0 9px)}
 button.small{padding:3px 8px;font-family:inherit;font-weight:400;font-size:13.5px}

@@ -27,7 +27,7 @@ function intentTable({ store: { state } }: PaymentsWorld): string {
   if (intents.length === 0) return '<p class="empty">Nothing has been paid yet.</p>';
   const rows = intents.map(
     (intent) => `<tr>
-<td class="mono">${escapeHtml(intent.id)}</td>
+<td class="mono keep">${escapeHtml(intent.id)}</td>
 <td class="right mono keep">${amountOf(intent)}</td>
 <td>${statusOf(intent)}${intent.last_payment_error ? `<br><span class="caption">${escapeHtml(intent.last_payment_error.message)}</span>` : ''}</td>
 <td class="narrow-off">${escapeHtml(accountName(state.accounts, intent.transfer_data?.destination))}</td>
