@@ -10,7 +10,7 @@ export function PublicHead({ children }: { children?: ReactNode }) {
         <BrandMark />
         Lotwright
       </Link>
-      {children && <nav aria-label="Main" className="ml-auto flex items-center gap-5">{children}</nav>}
+      {children && <nav aria-label="Site" className="ml-auto flex items-center gap-5">{children}</nav>}
     </header>
   );
 }

@@ -13,6 +13,7 @@ export interface PieceCounterProps extends FieldWords, Omit<ComponentProps<'inpu
 export function PieceCounter({ label, hint, error, frozen, className, min = 0, max, ref, ...input }: PieceCounterProps) {
   const id = useId();
   const own = useRef<HTMLInputElement | null>(null);
+  const of = typeof label === 'string' ? `, ${label}` : '';
   const words = { label, hint, error, frozen };
 
   const hold = (element: HTMLInputElement | null) => {
@@ -25,7 +26,7 @@ export function PieceCounter({ label, hint, error, frozen, className, min = 0, m
   return (
     <Field id={id} {...words} {...(className ? { className } : {})}>
       <span className={`flex h-12 border-heavy bg-field ${error ? 'border-held-ink' : 'border-ink'}`}>
-        <StepButton says="One less" sign="−" onClick={() => step(-1)} disabled={Boolean(frozen)} />
+        <StepButton says={`One less${of}`} sign="−" onClick={() => step(-1)} disabled={Boolean(frozen)} />
         <input
           inputMode="numeric"
           autoComplete="off"
@@ -36,7 +37,7 @@ export function PieceCounter({ label, hint, error, frozen, className, min = 0, m
           onFocus={(event) => event.currentTarget.select()}
           className="w-full min-w-14 flex-1 border-x-heavy border-ink bg-transparent text-center font-mono text-[1.1875rem] font-semibold"
         />
-        <StepButton says="One more" sign="+" onClick={() => step(1)} disabled={Boolean(frozen)} />
+        <StepButton says={`One more${of}`} sign="+" onClick={() => step(1)} disabled={Boolean(frozen)} />
       </span>
     </Field>
   );

@@ -8,6 +8,7 @@ import { shopSections } from '@/components/shell/sections';
 import { PageHead } from '@/components/ui/page-head';
 import { env } from '@/lib/env';
 import { DemoForms } from './demo-forms';
+import { DemoHeads } from './demo-heads';
 import { DemoLive, DemoNumberField, DemoScan } from './demo-live';
 import { DemoStates } from './demo-states';
 import { DemoTables } from './demo-tables';
@@ -45,6 +46,7 @@ export default async function KitPage() {
         <DemoForms />
         <DemoTables />
         <DemoLive />
+        <DemoHeads />
       </div>
     </ShopShell>
   );
