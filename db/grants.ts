@@ -104,7 +104,8 @@ export const DOOR_GRANTS: Record<string, readonly Verb[] | Columns> = {
   api_tokens: { select: ['id', 'shop_id', 'user_id', 'token_hash', 'scopes', 'expires_at', 'revoked_at', 'name'], update: ['last_used_at'] },
   throttles: EDIT,
   idempotency_keys: KEEP,
-  batches: { select: ['id', 'shop_id', 'processor_id', 'number', 'stage', 'order_number'] },
+  // What the page of a link says before anybody is signed in: what was asked, never a price.
+  batches: { select: ['id', 'shop_id', 'processor_id', 'number', 'stage', 'order_number', 'process', 'specification', 'specification_revision', 'class_type', 'pieces', 'wanted_back_on', 'dispatched_at'] },
   batch_links: { select: ['id', 'shop_id', 'batch_id', 'processor_id', 'token_hash', 'withdrawn_at', 'first_opened_at'], update: ['first_opened_at'] },
   dossier_links: { select: ['id', 'shop_id', 'lot_id', 'token_hash', 'expires_at', 'withdrawn_at'] },
   payments: { select: ['id', 'shop_id', 'invoice_id', 'intent_id'] },

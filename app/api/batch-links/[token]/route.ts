@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { readBatchLinkEndpoint } from '@/lib/portal/link-endpoints';
+
+export const GET = serve(readBatchLinkEndpoint);
