@@ -3,6 +3,7 @@ import { CredentialsSignin } from 'next-auth';
 import { cookies } from 'next/headers';
 import { redirect } from 'next/navigation';
 
+import type { SignInState } from '@/components/people/sign-in-state';
 import { primary } from '@/db/pools';
 import { countOrganisations } from '@/lib/people/choose-organisation';
 import { safeNext } from '@/lib/people/safe-next';
@@ -10,13 +11,6 @@ import { waitWords } from '@/lib/people/throttle';
 
 import { signIn } from './auth';
 import { claimsOf } from './session';
-
-export interface SignInState {
-  /** What is wrong, for the person; nothing before the first try. */
-  says?: string;
-  /** Kept as typed. */
-  email?: string;
-}
 
 /** E-mail and password from the form; works before any script has come. */
 export async function signInWithForm(_before: SignInState, form: FormData): Promise<SignInState> {

@@ -1,0 +1,21 @@
+import type { Metadata } from 'next';
+import { redirect } from 'next/navigation';
+
+import { viewer } from '@/app/_kit/prefetch';
+import { signInWithForm } from '@/app/_kit/sign-in';
+import { PublicPage } from '@/components/people/public-page';
+import { SignInForm } from '@/components/people/sign-in-form';
+import { safeNext } from '@/lib/people/safe-next';
+
+export const metadata: Metadata = { title: 'Sign in' };
+
+export default async function SignInPage({ searchParams }: { searchParams: Promise<{ next?: string; email?: string; error?: string }> }) {
+  const { next, email, error } = await searchParams;
+  const to = safeNext(next);
+  if ((await viewer()).actor.kind === 'person' && error === undefined) redirect(to);
+  return (
+    <PublicPage title="Sign in" lead="Out, proved, back: your batches, their processors and their papers.">
+      <SignInForm action={signInWithForm} next={to} email={email?.slice(0, 254)} refused={error === undefined ? undefined : 'You were not signed in. Try again.'} />
+    </PublicPage>
+  );
+}
