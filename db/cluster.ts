@@ -136,6 +136,11 @@ async function reachablePlace(folder: string, report: Report): Promise<string> {
   }
 
   await findOrInstallPostgres(report);
+  if ((await run('id', ['postgres'])).code !== 0) {
+    throw new CannotStart(
+      'PostgreSQL does not run as root, and there is no account named postgres to run it as: make one, or start Lotwright as an ordinary user.',
+    );
+  }
   const probe = await runAsServer('test', ['-x', dirname(folder)]);
   if (probe.code === 0) return folder;
 
