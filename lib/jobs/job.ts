@@ -6,6 +6,8 @@ import type { Ctx } from '@/lib/auth/context';
 export interface JobTools {
   /** Opens a transaction in the shop and hands in a context whose actor is this job. */
   inShop<T>(shopId: string, work: (ctx: Ctx) => Promise<T>): Promise<T>;
+  /** The same before it is known whose it is: a webhook's event. */
+  atDoor<T>(work: (ctx: Ctx) => Promise<T>): Promise<T>;
   now(): Date;
   /** Which attempt this is, from 1. */
   attempt: number;

@@ -1,7 +1,8 @@
 import { createServer } from 'node:http';
 import PgBoss from 'pg-boss';
 
-import { connect, withTenant, type Db } from '@/db/client';
+import { connect, withTenant, type Db, type Tenant } from '@/db/client';
+import type { Ctx } from '@/lib/auth/context';
 import { env } from '@/lib/env';
 import { newId } from '@/lib/ids';
 import { log } from '@/lib/log';
@@ -43,13 +44,13 @@ async function listen(boss: PgBoss, db: Db, job: Job): Promise<void> {
 
 /** Runs one job as the worker does; tests call it through `runJobs`. */
 export async function runJob(db: Db, job: Job, data: unknown, attempt: number, jobId: string): Promise<void> {
+  const within = <T>(tenant: Tenant, work: (ctx: Ctx) => Promise<T>): Promise<T> =>
+    withTenant(db, tenant, (tx) => work({ tenant, actor: { kind: 'job', name: job.name, roles: [] }, tx, now: new Date(), requestId: jobId || newId(), address: null }));
   const tools: JobTools = {
     attempt,
     now: () => new Date(),
-    inShop: (shopId, work) =>
-      withTenant(db, { kind: 'shop', shopId, personId: null }, (tx) =>
-        work({ tenant: { kind: 'shop', shopId, personId: null }, actor: { kind: 'job', name: job.name, roles: [] }, tx, now: new Date(), requestId: jobId || newId(), address: null }),
-      ),
+    inShop: (shopId, work) => within({ kind: 'shop', shopId, personId: null }, work),
+    atDoor: (work) => within({ kind: 'door' }, work),
   };
   try {
     await job.run(tools, job.payload.parse(data));

@@ -14,7 +14,7 @@ export type PaymentNotice = { eventId: string; type: string; occurredAt: Date } 
       reason: string | null;
       metadata: Record<string, string>;
     }
-  | { about: 'refund'; intentId: string | null; refundedMinor: number; currency: string }
+  | { about: 'refund'; intentId: string | null; refundedMinor: number; currency: string; metadata: Record<string, string> }
   | { about: 'account'; accountId: string; canReceive: boolean }
   | { about: 'payment_method'; customer: string; paymentMethod: string }
   | { about: 'nothing' }
@@ -27,7 +27,11 @@ export function parseWebhook(
   secret: string = env.STRIPE_WEBHOOK_SECRET,
   stripe: Stripe = ownStripe(),
 ): PaymentNotice {
-  const event = verified(rawBody, signature ?? '', { secret, stripe });
+  return noticeOf(verified(rawBody, signature ?? '', { secret, stripe }));
+}
+
+/** What an event tells us, of one whose signature was checked when it came. */
+export function noticeOf(event: Stripe.Event): PaymentNotice {
   return { eventId: event.id, type: event.type, occurredAt: new Date(event.created * 1000), ...contentOf(event) };
 }
 
@@ -80,6 +84,7 @@ function refundOf(charge: Stripe.Charge): Content {
     intentId: idOf(charge.payment_intent),
     refundedMinor: charge.amount_refunded,
     currency: charge.currency.toUpperCase(),
+    metadata: charge.metadata,
   };
 }
 

@@ -87,12 +87,14 @@ export interface InvoicePayment {
    * whoever calls this must also have looked whether the invoice already has an intent.
    */
   idempotencyKey: string;
+  /** What the transfer carries, for whoever reads the processor's statement. */
+  description?: string;
   metadata: Record<string, string>;
 }
 
 /** Pays a processor from the shop's saved method. What is returned is provisional; the truth comes by webhook. */
 export function payInvoiceIntent(payment: InvoicePayment, stripe: Stripe = ownStripe()): Promise<PaymentAttempt> {
-  const { amountMinor, currency, customer, paymentMethod, destinationAccount, idempotencyKey, metadata } = payment;
+  const { amountMinor, currency, customer, paymentMethod, destinationAccount, idempotencyKey, description, metadata } = payment;
   return attempt(() =>
     stripe.paymentIntents.create(
       {
@@ -105,11 +107,37 @@ export function payInvoiceIntent(payment: InvoicePayment, stripe: Stripe = ownSt
         // Nobody is at a screen when the worker pays, so a method that needs a redirect must be refused, not left hanging.
         automatic_payment_methods: { enabled: true, allow_redirects: 'never' },
         transfer_data: { destination: destinationAccount },
+        ...(description === undefined ? {} : { description }),
         metadata,
       },
       { idempotencyKey },
     ),
   );
+}
+
+/**
+ * The intent that was made for this attempt of ours and could not be written down any more, or null. Looked for before
+ * one is made: the service forgets idempotency keys after a day, this never.
+ */
+export async function findPaymentIntent(
+  wanted: { customer: string; paymentId: string; since: Date },
+  stripe: Stripe = ownStripe(),
+): Promise<Stripe.PaymentIntent | null> {
+  const { customer, paymentId, since } = wanted;
+  const created = { gte: Math.floor(since.getTime() / 1000) - CLOCKS_APART_S };
+  return reaching(async () => {
+    for await (const intent of stripe.paymentIntents.list({ customer, created, limit: 100 })) {
+      if (intent.metadata['payment_id'] === paymentId) return intent;
+    }
+    return null;
+  });
+}
+
+const CLOCKS_APART_S = 3600;
+
+/** Ends an intent that nobody has paid, so that nobody can pay it any more. */
+export async function cancelPaymentIntent(intentId: string, stripe: Stripe = ownStripe()): Promise<void> {
+  await reaching(() => stripe.paymentIntents.cancel(intentId));
 }
 
 /** Tries again after a decline, on the same intent: an intent can be paid only once, however often it is tried. */
@@ -123,9 +151,9 @@ export function retryInvoiceIntent(
   );
 }
 
-/** The intent as it stands now, for when webhooks came out of order or not at all. */
+/** The intent as it stands now, with its last charge: webhooks come out of order, or not at all. */
 export async function getPaymentIntent(intentId: string, stripe: Stripe = ownStripe()): Promise<Stripe.PaymentIntent> {
-  return reaching(() => stripe.paymentIntents.retrieve(intentId));
+  return reaching(() => stripe.paymentIntents.retrieve(intentId, { expand: ['latest_charge'] }));
 }
 
 /** Takes back all or part of a payment, from the processor's account too. Returns the refund's id. */
