@@ -22,7 +22,7 @@ export function Field({ id, label, hint, error, frozen, className = '', children
   const below = frozen ?? hint;
   return (
     <div className={`flex min-w-0 flex-col gap-[3px] ${className}`}>
-      <label htmlFor={id} className="font-cond text-word leading-[1.125rem]">
+      <label id={`${id}-label`} htmlFor={id} className="font-cond text-word leading-[1.125rem]">
         {label}
       </label>
       {children}

@@ -13,7 +13,6 @@ export interface PieceCounterProps extends FieldWords, Omit<ComponentProps<'inpu
 export function PieceCounter({ label, hint, error, frozen, className, min = 0, max, ref, ...input }: PieceCounterProps) {
   const id = useId();
   const own = useRef<HTMLInputElement | null>(null);
-  const of = typeof label === 'string' ? `, ${label}` : '';
   const words = { label, hint, error, frozen };
 
   const hold = (element: HTMLInputElement | null) => {
@@ -26,7 +25,7 @@ export function PieceCounter({ label, hint, error, frozen, className, min = 0, m
   return (
     <Field id={id} {...words} {...(className ? { className } : {})}>
       <span className={`flex h-12 border-heavy bg-field ${error ? 'border-held-ink' : 'border-ink'}`}>
-        <StepButton says={`One less${of}`} sign="−" onClick={() => step(-1)} disabled={Boolean(frozen)} />
+        <StepButton says="One less" about={`${id}-label`} sign="−" onClick={() => step(-1)} disabled={Boolean(frozen)} />
         <input
           inputMode="numeric"
           autoComplete="off"
@@ -37,7 +36,7 @@ export function PieceCounter({ label, hint, error, frozen, className, min = 0, m
           onFocus={(event) => event.currentTarget.select()}
           className="w-full min-w-14 flex-1 border-x-heavy border-ink bg-transparent text-center font-mono text-[1.1875rem] font-semibold"
         />
-        <StepButton says={`One more${of}`} sign="+" onClick={() => step(1)} disabled={Boolean(frozen)} />
+        <StepButton says="One more" about={`${id}-label`} sign="+" onClick={() => step(1)} disabled={Boolean(frozen)} />
       </span>
     </Field>
   );
@@ -45,16 +44,19 @@ export function PieceCounter({ label, hint, error, frozen, className, min = 0, m
 
 interface StepButtonProps {
   says: string;
+  /** The label of the count, so that two counters on a page are told apart. */
+  about: string;
   sign: string;
   onClick: () => void;
   disabled: boolean;
 }
 
-function StepButton({ says, sign, ...button }: StepButtonProps) {
+function StepButton({ says, about, sign, ...button }: StepButtonProps) {
   return (
     <button
       type="button"
       aria-label={says}
+      aria-describedby={about}
       {...button}
       className="relative flex-none basis-12 text-[1.375rem] leading-none hover:bg-bench focus-visible:z-10 active:bg-deep disabled:text-faint"
     >
