@@ -19,6 +19,9 @@ export const fileColumns = {
   createdAt: files.createdAt,
 };
 
+/** A file as a page of another thing names it. */
+export const fileRefColumns = { id: files.id, name: files.name, size: files.size, mediaType: files.mediaType, sha256: files.sha256 };
+
 export async function getFile(ctx: Ctx, { fileId }: { fileId: string }) {
   authorize(ctx, 'file.read');
   const [file] = await ctx.tx.select(fileColumns).from(files).where(eq(files.id, fileId));

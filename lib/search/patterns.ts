@@ -11,3 +11,6 @@ export function patternsOf(text: string): string[] {
   if (/^\d+$/.test(typed)) patterns.push(...['B-', 'L-', 'NC-'].map((prefix) => prefix + typed.padStart(4, '0')));
   return [...new Set(patterns)].map((pattern) => `${escaped(pattern)}%`);
 }
+
+/** For names and words: anywhere in them. Used with `ilike`. */
+export const contains = (text: string): string => `%${escaped(text.trim())}%`;

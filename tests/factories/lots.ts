@@ -11,7 +11,7 @@ export async function makePart(ctx: Ctx, given: { processes?: readonly Process[]
   const number = given.number ?? `P-${id.slice(-8)}`;
   await ctx.tx.insert(parts).values({ id, shopId: shopOf(ctx), number, revision: 'A', name: 'Rib clip', alloy: '2024', form: 'sheet', clad: true, thicknessMm: 1.016, thicknessEntered: '0.040 in', madeCondition: 'O', endCondition: 'T42', serialised: given.serialised ?? false, createdAt: ctx.now });
   const steps = (given.processes ?? ['solution_heat_treat_and_age']).map((process, at) => ({ id: newId(), shopId: shopOf(ctx), partId: id, seq: at + 1, process, specification: 'AMS 2770', specificationRevision: 'R', conditionBefore: 'O', targetCondition: 'T42' }));
-  await ctx.tx.insert(routeSteps).values(steps);
+  if (steps.length > 0) await ctx.tx.insert(routeSteps).values(steps);
   return { id, number, stepIds: steps.map((step) => step.id) };
 }
 

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { checkLotImportEndpoint } from '@/lib/lots/endpoints';
+
+export const POST = serve(checkLotImportEndpoint);

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { revisePartEndpoint } from '@/lib/parts/endpoints';
+
+export const POST = serve(revisePartEndpoint);
