@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { withdrawApprovalEndpoint } from '@/lib/processors/endpoints';
+
+export const POST = serve(withdrawApprovalEndpoint);
