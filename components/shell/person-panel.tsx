@@ -1,7 +1,6 @@
 'use client';
 
 import Link from 'next/link';
-import { useRouter } from 'next/navigation';
 import { type ReactNode, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Checkbox, RadioGroup } from '@/components/ui/choice';
@@ -26,17 +25,12 @@ const LOOK_WORDS = [
 ] as const;
 
 export function PersonPanel({ look, singleKeys, accountHref, signOut, extra }: PersonPanelProps) {
-  const router = useRouter();
   const [chosen, setChosen] = useState(look);
 
   const chooseLook = (value: string) => {
     const next = LOOK_WORDS.find((word) => word.value === value)?.value ?? 'device';
     setChosen(next);
     keepLook(next);
-  };
-  const chooseKeys = (on: boolean) => {
-    keepSingleKeys(on);
-    router.refresh();
   };
 
   return (
@@ -51,7 +45,7 @@ export function PersonPanel({ look, singleKeys, accountHref, signOut, extra }: P
         says="Single keys"
         note="J, K, G and others; ? lists them"
         defaultChecked={singleKeys}
-        onChange={(event) => chooseKeys(event.currentTarget.checked)}
+        onChange={(event) => keepSingleKeys(event.currentTarget.checked)}
       />
       {extra}
       <div className="flex flex-wrap items-center gap-x-5 border-t border-rule pt-3">

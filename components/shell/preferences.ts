@@ -1,3 +1,4 @@
+import { SINGLE_KEYS_EVENT } from '@/components/ui/keys';
 import { KEYS_COOKIE, type Look, LOOK_COOKIE, LOOKS } from './look';
 
 const A_YEAR_S = 31_536_000;
@@ -11,6 +12,7 @@ export function keepLook(look: Look): void {
 
 export function keepSingleKeys(on: boolean): void {
   keep(KEYS_COOKIE, on ? 'on' : 'off');
+  window.dispatchEvent(new CustomEvent(SINGLE_KEYS_EVENT, { detail: on }));
 }
 
 function keep(name: string, value: string) {

@@ -7,13 +7,17 @@ import { KeyHelp, type KeyLine } from './key-help';
 /** Sent with what a scanner typed into the open page. */
 export const SCAN_EVENT = 'lotwright:scan';
 
+/** Sent when the person switches single keys on or off: it must hold before the page has come again. */
+export const SINGLE_KEYS_EVENT = 'lotwright:single-keys';
+
 const SEQUENCE_MS = 1200;
 
 /**
  * Keys of every page, mounted once by the shell. A key presses whatever carries `data-key` with its name, so a page
  * says what its keys do simply by showing the buttons.
  */
-export function Keys({ singleKeys = true }: { singleKeys?: boolean }) {
+export function Keys({ singleKeys: given = true }: { singleKeys?: boolean }) {
+  const singleKeys = useSwitchedHere() ?? given;
   const [help, setHelp] = useState<readonly KeyLine[] | null>(null);
 
   useEffect(() => {
@@ -43,6 +47,16 @@ export function Keys({ singleKeys = true }: { singleKeys?: boolean }) {
   }, [singleKeys]);
 
   return <KeyHelp keys={help} onClose={() => setHelp(null)} />;
+}
+
+function useSwitchedHere(): boolean | null {
+  const [switched, setSwitched] = useState<boolean | null>(null);
+  useEffect(() => {
+    const take = (event: Event) => event instanceof CustomEvent && setSwitched(event.detail === true);
+    window.addEventListener(SINGLE_KEYS_EVENT, take);
+    return () => window.removeEventListener(SINGLE_KEYS_EVENT, take);
+  }, []);
+  return switched;
 }
 
 /** Typing belongs to fields, and to a dialog that asks something. */
