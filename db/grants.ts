@@ -107,7 +107,7 @@ export const DOOR_GRANTS: Record<string, readonly Verb[] | Columns> = {
   // What the page of a link says before anybody is signed in: what was asked, never a price.
   batches: { select: ['id', 'shop_id', 'processor_id', 'number', 'stage', 'order_number', 'process', 'specification', 'specification_revision', 'class_type', 'pieces', 'wanted_back_on', 'dispatched_at'] },
   batch_links: { select: ['id', 'shop_id', 'batch_id', 'processor_id', 'token_hash', 'withdrawn_at', 'first_opened_at'], update: ['first_opened_at'] },
-  dossier_links: { select: ['id', 'shop_id', 'lot_id', 'token_hash', 'expires_at', 'withdrawn_at'] },
+  dossier_links: { select: ['for_whom', 'id', 'shop_id', 'lot_id', 'token_hash', 'expires_at', 'withdrawn_at'] },
   payments: { select: ['id', 'shop_id', 'invoice_id', 'intent_id'] },
   payment_events: KEEP,
 };

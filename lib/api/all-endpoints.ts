@@ -6,10 +6,13 @@ import * as dossiers from '@/lib/dossiers/endpoints';
 import * as files from '@/lib/files/endpoints';
 import * as jobs from '@/lib/jobs/endpoints';
 import * as lots from '@/lib/lots/endpoints';
+import * as messages from '@/lib/messages/endpoints';
 import * as nonconformances from '@/lib/nonconformances/endpoints';
 import * as organisations from '@/lib/organisations/endpoints';
 import * as parts from '@/lib/parts/endpoints';
 import * as people from '@/lib/people/endpoints';
+import * as portal from '@/lib/portal/endpoints';
+import * as batchLinks from '@/lib/portal/link-endpoints';
 import * as processors from '@/lib/processors/endpoints';
 import * as receipts from '@/lib/receipts/endpoints';
 import * as search from '@/lib/search/endpoints';
@@ -20,4 +23,4 @@ import * as tideline from '@/lib/tideline/endpoints';
 import type { Endpoint } from './endpoint';
 
 /** Every read and write there is: what the documentation and the walk over all permissions go by. */
-export const ALL_ENDPOINTS: readonly Endpoint[] = [assemblies, audit, batches, certificates, dossiers, files, jobs, lots, nonconformances, organisations, parts, people, processors, receipts, search, session, stock, tideline].flatMap((domain) => Object.values(domain) as unknown as Endpoint[]);
+export const ALL_ENDPOINTS: readonly Endpoint[] = [assemblies, audit, batchLinks, batches, certificates, dossiers, files, jobs, lots, messages, nonconformances, organisations, parts, people, portal, processors, receipts, search, session, stock, tideline].flatMap((domain) => Object.values(domain) as unknown as Endpoint[]);

@@ -1,0 +1,3 @@
+import { z } from 'zod';
+
+export const assembleDossierQueue = { name: 'assemble-dossier', payload: z.object({ shopId: z.uuid(), dossierId: z.uuid() }) };

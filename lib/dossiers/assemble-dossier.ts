@@ -1,0 +1,37 @@
+import { and, eq, isNull } from 'drizzle-orm';
+import type { z } from 'zod';
+
+import { dossiers } from '@/db/schema/evidence';
+import { recordAudit } from '@/lib/audit/record-audit';
+import { storeMadeFile } from '@/lib/files/store-made-file';
+import type { JobTools } from '@/lib/jobs/job';
+import { getObject } from '@/lib/storage/object-store';
+
+import type { assembleDossierQueue } from './assemble-dossier-queue';
+import { makeArchive } from './make-archive';
+import { readDossier } from './read-dossier';
+import { renderDossier } from './render-dossier';
+
+/** Makes the document and the archive of a dossier that was asked for. Run again, it finds what it made before. */
+export async function assembleDossier(tools: JobTools, { shopId, dossierId }: z.output<typeof assembleDossierQueue.payload>): Promise<void> {
+  const asked = await tools.inShop(shopId, async (ctx) => {
+    const [dossier] = await ctx.tx.select().from(dossiers).where(and(eq(dossiers.id, dossierId), isNull(dossiers.finishedAt)));
+    return dossier ? { dossier, content: await readDossier(ctx, dossier.lotId) } : null;
+  });
+  if (!asked) return;
+  const { dossier, content } = asked;
+  const name = `${content.lot.number} ${content.part.number} rev ${content.part.revision}`;
+  const document = await renderDossier(content, dossier.statedAt);
+  const archive = await makeArchive({ content, document, statedAt: dossier.statedAt, open: async (file) => (await getObject(file.storageKey)).body });
+  const stored = { shopId, batchId: null };
+  const pdf = await storeMadeFile(tools, { ...stored, purpose: 'dossier', name: `${name} dossier.pdf`, mediaType: 'application/pdf', content: document });
+  const zip = await storeMadeFile(tools, { ...stored, purpose: 'archive', name: `${name} dossier.zip`, mediaType: 'application/zip', content: archive });
+  await tools.inShop(shopId, async (ctx) => {
+    const [finished] = await ctx.tx
+      .update(dossiers)
+      .set({ documentFileId: pdf.fileId, archiveFileId: zip.fileId, finishedAt: ctx.now })
+      .where(and(eq(dossiers.id, dossierId), isNull(dossiers.finishedAt)))
+      .returning({ id: dossiers.id });
+    if (finished) await recordAudit(ctx, { action: 'dossier.make', entity: 'lot', entityId: dossier.lotId, after: { documentSha256: pdf.sha256, archiveSha256: zip.sha256 } });
+  });
+}

@@ -1,0 +1,81 @@
+import { z } from 'zod';
+
+import { declare } from '@/lib/api/endpoint';
+import { BINARY, Done, Id, Moment } from '@/lib/api/shapes';
+
+const Evidence = z.custom<Omit<import('./content').DossierContent, 'files'> & { files: Omit<import('./content').DossierFile, 'storageKey'>[] }>();
+
+export const DossierMade = z.object({ id: Id, statedAt: Moment, requestedBy: z.string(), finished: z.boolean(), failure: z.string().nullable(), documentFileId: Id.nullable(), archiveFileId: Id.nullable() });
+export type DossierMade = z.output<typeof DossierMade>;
+
+export const getDossier = declare({
+  id: 'getDossier',
+  method: 'get',
+  path: '/lots/{lotId}/dossier',
+  summary: 'All the evidence of a lot, the dossiers made of it, and the links given out',
+  side: 'shop',
+  permission: 'dossier.read',
+  input: z.object({ lotId: Id }),
+  response: z.object({
+    evidence: Evidence,
+    made: z.array(DossierMade),
+    links: z.array(z.object({ id: Id, forWhom: z.string(), expiresAt: Moment, withdrawnAt: Moment.nullable(), createdBy: z.string(), createdAt: Moment })),
+  }),
+});
+
+export const requestDossier = declare({
+  id: 'requestDossier',
+  method: 'post',
+  path: '/lots/{lotId}/dossier',
+  summary: 'Make the dossier of a lot as one document and one archive of every original',
+  side: 'shop',
+  permission: 'dossier.read',
+  input: z.object({ lotId: Id }),
+  response: z.object({ id: Id }),
+});
+
+export const shareDossier = declare({
+  id: 'shareDossier',
+  method: 'post',
+  path: '/lots/{lotId}/dossier-links',
+  summary: 'A read-only link to a dossier for somebody outside; the address is told once',
+  side: 'shop',
+  permission: 'dossier.share',
+  input: z.object({ lotId: Id, forWhom: z.string().trim().min(2, 'Say for whom it is.').max(120), days: z.int().min(1, 'At least 1 day.').max(366, 'At most 366 days.') }),
+  response: z.object({ id: Id, url: z.string() }),
+});
+
+export const withdrawDossierLink = declare({
+  id: 'withdrawDossierLink',
+  method: 'post',
+  path: '/dossier-links/{linkId}/withdraw',
+  summary: 'End a dossier link now',
+  side: 'shop',
+  permission: 'dossier.share',
+  input: z.object({ linkId: Id }),
+  response: Done,
+});
+
+const Token = z.string().min(16).max(200);
+
+export const openDossierLink = declare({
+  id: 'openDossierLink',
+  method: 'get',
+  path: '/shared-dossiers/{token}',
+  summary: 'What a dossier link shows',
+  side: 'public',
+  permission: 'public.use',
+  input: z.object({ token: Token }),
+  response: z.object({ forWhom: z.string(), expiresAt: Moment, evidence: Evidence, made: DossierMade.nullable() }),
+});
+
+export const readSharedFile = declare({
+  id: 'readSharedFile',
+  method: 'get',
+  path: '/shared-dossiers/{token}/files/{fileId}',
+  summary: 'One file of a shared dossier: the document, the archive or an original',
+  side: 'public',
+  permission: 'public.use',
+  input: z.object({ token: Token, fileId: Id, inline: z.enum(['0', '1']).default('0') }),
+  response: BINARY,
+});
