@@ -49,7 +49,10 @@ async function readAll(queries: readonly Asked[]): Promise<{ key: readonly unkno
       const ctx: Ctx = { ...identity, tx, now: new Date(), requestId: newId(), address: null };
       const results = [];
       for (const [{ declaration, run }, input] of queries) {
-        const data = declaration.response.parse(await run(ctx, declaration.input.parse(input)));
+        const asked = declaration.input.safeParse(input);
+        // An address that nothing could be asked for: no such thing is there.
+        if (!asked.success) notFound();
+        const data = declaration.response.parse(await run(ctx, asked.data));
         results.push({ key: queryKeyOf(declaration, input), data });
       }
       return results;

@@ -23,8 +23,12 @@ export function useLazyRead<D extends Declaration>(declaration: D, input: InputO
 
 /** A list that loads further pages by key. The first page is the prefetched one. */
 export function usePages<D extends Declaration>(declaration: D, input: InputOf<D>) {
+  const cache = useQueryClient();
+  const firstKey = queryKeyOf(declaration, input as Record<string, unknown>);
+  const first = cache.getQueryState<OutputOf<D> & { next: string | null }>(firstKey);
   return useInfiniteQuery({
-    queryKey: [...queryKeyOf(declaration, input as Record<string, unknown>), 'pages'],
+    queryKey: [...firstKey, 'pages'],
+    ...(first?.data ? { initialData: { pages: [first.data], pageParams: [null] }, initialDataUpdatedAt: first.dataUpdatedAt } : {}),
     queryFn: ({ pageParam, signal }) => call(declaration, { ...(input as object), ...(pageParam === null ? {} : { after: pageParam }) } as InputOf<D>, { signal }) as Promise<OutputOf<D> & { next: string | null }>,
     initialPageParam: null as string | null,
     getNextPageParam: (page: { next: string | null }) => page.next,

@@ -1,0 +1,15 @@
+import type { Metadata } from 'next';
+
+import { ask, Prefetched } from '@/app/_kit/prefetch';
+import { CertificatesScreen } from '@/components/certificates/certificates-screen';
+import { getMeEndpoint } from '@/lib/session/endpoints';
+
+export const metadata: Metadata = { title: 'Certificates' };
+
+export default function CertificatesPage() {
+  return (
+    <Prefetched queries={[ask(getMeEndpoint, {})]}>
+      <CertificatesScreen />
+    </Prefetched>
+  );
+}

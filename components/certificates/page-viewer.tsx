@@ -1,0 +1,91 @@
+'use client';
+import dynamic from 'next/dynamic';
+import type { ReactNode } from 'react';
+
+import { Button } from '@/components/ui/button';
+
+import { usePaging, type Paging } from './use-paging';
+import { useElementWidth } from './use-width';
+
+// Drawing pages needs a browser; the server sends the frame only.
+const PdfPage = dynamic(() => import('./pdf-page').then((module) => module.PdfPage), { ssr: false });
+
+export interface ViewedFile {
+  id: string;
+  name: string;
+  mediaType: string;
+}
+
+interface PageViewerProps {
+  file: ViewedFile;
+  title: ReactNode;
+  /** Who sent it and when, its hash. */
+  facts: ReactNode;
+  /** Other files of the batch to look at: charts. */
+  choice?: ReactNode;
+}
+
+/** A received file, page by page, as large as the room it has. */
+export function PageViewer({ file, title, facts, choice }: PageViewerProps) {
+  const paging = usePaging();
+  const { element, width } = useElementWidth<HTMLDivElement>();
+  const url = `/api/files/${file.id}/content?inline=1`;
+  const drawn = Math.max(200, Math.floor((width - 36) * paging.zoom));
+  return (
+    <section aria-label={`File ${file.name}`} className="flex min-w-0 flex-col bg-deep">
+      <div className="flex min-h-[38px] flex-wrap items-center gap-x-3.5 gap-y-1 border-b border-rule bg-bench py-1 pr-4 pl-6 text-string max-md:pl-4">
+        <strong className="font-cond text-sub">{title}</strong>
+        {facts}
+      </div>
+      <ViewerControls paging={paging} choice={choice} />
+      <div ref={element} tabIndex={0} role="region" aria-label={`Page ${paging.page} of ${paging.pages}`} className="min-h-[320px] flex-1 overflow-auto max-lg:max-h-[60dvh]">
+        <div className="flex w-max min-w-full justify-center p-[18px]">
+          {width > 0 && file.mediaType === 'application/pdf' && <PdfPage url={url} page={paging.page} width={drawn} turned={paging.turned} onPages={paging.setPages} />}
+          {file.mediaType.startsWith('image/') && (
+            // A received picture is shown from where it is kept; no copy of another size would be the original.
+            // eslint-disable-next-line @next/next/no-img-element -- see above
+            <img src={url} alt={`The received picture ${file.name}`} width={drawn} style={{ width: drawn, transform: `rotate(${paging.turned}deg)` }} className="h-auto max-w-none" />
+          )}
+          {file.mediaType !== 'application/pdf' && !file.mediaType.startsWith('image/') && (
+            <p className="p-6">
+              This file cannot be shown here. <a href={`/api/files/${file.id}/content`}>Save it</a>
+            </p>
+          )}
+        </div>
+      </div>
+    </section>
+  );
+}
+
+function ViewerControls({ paging, choice }: { paging: Paging; choice: ReactNode }) {
+  return (
+    <div className="flex flex-wrap items-center gap-x-4 gap-y-1 border-b border-rule bg-bench px-6 py-1 text-string max-md:px-4">
+      <span className="flex items-center gap-2 whitespace-nowrap">
+        <Button look="word" shortcut="[" aria-label="Page before" onClick={() => paging.toPage(paging.page - 1)}>
+          Before
+        </Button>
+        <span className="text-quiet" aria-live="polite">
+          page <span className="num">{paging.page}</span> of <span className="num">{paging.pages}</span>
+        </span>
+        <Button look="word" shortcut="]" aria-label="Next page" onClick={() => paging.toPage(paging.page + 1)}>
+          Next
+        </Button>
+      </span>
+      <span className="flex items-center gap-3 whitespace-nowrap">
+        <Button look="word" shortcut="+" aria-label="Nearer" onClick={paging.nearer}>
+          Nearer
+        </Button>
+        <Button look="word" shortcut="-" aria-label="Further" onClick={paging.further}>
+          Further
+        </Button>
+        <Button look="word" aria-label="Turn by a quarter" onClick={paging.turn}>
+          Turn
+        </Button>
+        <Button look="word" onClick={paging.whole}>
+          Whole page
+        </Button>
+      </span>
+      {choice && <span className="ml-auto">{choice}</span>}
+    </div>
+  );
+}

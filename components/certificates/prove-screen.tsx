@@ -1,0 +1,62 @@
+'use client';
+import { useState } from 'react';
+
+import { Button } from '@/components/ui/button';
+import { Moment } from '@/components/ui/day';
+import { useClock } from '@/components/session/use-me';
+
+import { certificateName, shortHash } from './certificate-words';
+import { PageViewer } from './page-viewer';
+import { ProvePanel } from './prove-panel';
+import { useProving, type Proving } from './use-proving';
+
+/** The page left, what it must prove right. */
+export function ProveScreen({ certificateId }: { certificateId: string }) {
+  const proving = useProving(certificateId);
+  return (
+    <div className="-mx-6 -mb-9 grid grid-cols-1 max-md:-mx-4 lg:min-h-[calc(100dvh-48px)] lg:grid-cols-[minmax(0,676fr)_minmax(0,764fr)]">
+      <div className="min-w-0 border-ink max-lg:border-b-heavy lg:sticky lg:top-0 lg:flex lg:h-[calc(100dvh-48px)] lg:border-r-heavy [&>*]:flex-1">
+        <Viewed proving={proving} />
+      </div>
+      <ProvePanel proving={proving} />
+    </div>
+  );
+}
+
+function Viewed({ proving: { data } }: { proving: Proving }) {
+  const clock = useClock();
+  const [chartId, setChartId] = useState<string | null>(null);
+  const chart = data.charts.find((one) => one.id === chartId);
+  const { certificate, file } = data;
+  const title = chart ? `Chart ${chart.fileName}` : `Certificate ${certificateName({ ...certificate, fileName: file.name })}`;
+  const shown = chart ? { id: chart.fileId, name: chart.fileName, mediaType: chart.mediaType } : file;
+  const facts = (
+    <>
+      <span className="text-quiet">
+        from {certificate.sentBy}, <Moment at={new Date(certificate.createdAt)} clock={clock} />
+      </span>
+      {!chart && file.sha256 && (
+        <span className="num ml-auto text-quiet" title={file.sha256}>
+          sha-256 {shortHash(file.sha256)}
+        </span>
+      )}
+    </>
+  );
+  const choice = data.charts.length > 0 && (
+    <span className="flex flex-wrap gap-x-3">
+      {chart && (
+        <Button look="word" onClick={() => setChartId(null)}>
+          Certificate
+        </Button>
+      )}
+      {data.charts
+        .filter((one) => one.id !== chartId)
+        .map((one) => (
+          <Button key={one.id} look="word" onClick={() => setChartId(one.id)}>
+            Chart {one.fileName}
+          </Button>
+        ))}
+    </span>
+  );
+  return <PageViewer key={shown.id} file={shown} title={title} facts={facts} choice={choice} />;
+}

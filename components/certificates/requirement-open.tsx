@@ -1,0 +1,135 @@
+'use client';
+import { useState, type KeyboardEvent } from 'react';
+
+import { HoldForm } from '@/components/nonconformances/hold-form';
+import { useMay } from '@/components/session/use-me';
+import { Button, ButtonLink } from '@/components/ui/button';
+import { TextField } from '@/components/ui/field';
+import type { ProvedRequirement } from '@/lib/certificates/contract';
+import type { Verdict } from '@/lib/certificates/verdict';
+
+import { limitWords } from './certificate-words';
+import { OverrideDialog } from './override-dialog';
+import type { Proving } from './use-proving';
+
+interface RequirementOpenProps {
+  requirement: ProvedRequirement;
+  proving: Proving;
+  canEdit: boolean;
+}
+
+const SOURCES = { drawing: 'drawing', specification: 'specification', shop: 'shop' } as const;
+
+/** A row opened in place: what it states, the verdict, and the ways out where it does not hold. */
+export function RequirementOpen({ requirement, proving, canEdit }: RequirementOpenProps) {
+  const mayHold = useMay('nonconformance.raise');
+  const [holding, setHolding] = useState(false);
+  const { decision } = requirement;
+  const { certificate, batch } = proving.data;
+  const processor = batch.processor.split(' ')[0] ?? batch.processor;
+  return (
+    <tr role="row">
+      <td role="cell" colSpan={6} className="border-b-heavy border-ink bg-bench">
+        <div className="flex flex-col gap-2.5 py-2 pl-9 max-md:pl-0">
+          <p className="text-second">
+            <SourceWords requirement={requirement} />
+            {decision && (
+              <span className="text-quiet">
+                {' '}
+                Decided by {decision.decidedBy}.{decision.note && ` ${decision.note}`}
+              </span>
+            )}
+          </p>
+          {canEdit && <Judge requirement={requirement} proving={proving} />}
+          {!holding && (
+            <div className="flex flex-wrap gap-2">
+              {canEdit && decision && decision.verdict !== 'meets' && <OverrideDialog requirement={requirement} proving={proving} />}
+              {mayHold && (
+                <Button size="small" look="stop" shortcut="H" onClick={() => setHolding(true)}>
+                  Hold pieces
+                </Button>
+              )}
+              {decision && decision.verdict !== 'meets' && (
+                <ButtonLink size="small" shortcut="A" href={`/batches/${batch.id}?ask=${encodeURIComponent(questionOf(requirement))}#messages`}>
+                  Ask {processor} to correct
+                </ButtonLink>
+              )}
+            </div>
+          )}
+          {holding && (
+            <HoldForm
+              batchId={batch.id}
+              onlyLineId={requirement.lineId}
+              requirementId={requirement.id}
+              certificateId={certificate.id}
+              kind={decision?.verdict === 'does_not_meet' ? 'requirement' : 'papers'}
+              what={whatIsWrong(requirement)}
+              onDone={() => setHolding(false)}
+            />
+          )}
+        </div>
+      </td>
+    </tr>
+  );
+}
+
+function SourceWords({ requirement }: { requirement: ProvedRequirement }) {
+  const { characteristic, source, sourceText } = requirement;
+  return (
+    <>
+      {characteristic}: {limitWords(requirement) || 'must be stated'}. <span className="text-source text-faint">{sourceText || `From the ${SOURCES[source]}.`}</span>
+    </>
+  );
+}
+
+function Judge({ requirement, proving }: Omit<RequirementOpenProps, 'canEdit'>) {
+  const { decision } = requirement;
+  const [stated, setStated] = useState(decision?.stated ?? '');
+  const judge = async (verdict: Verdict) => {
+    if (verdict === 'meets') proving.onward(requirement.id);
+    await proving.decide(requirement, { verdict, stated: stated.trim() || (verdict === 'meets' ? 'as ordered' : '') });
+  };
+  const onKeyDown = (event: KeyboardEvent) => {
+    if (event.key === 'Enter') {
+      event.preventDefault();
+      void judge('meets');
+    } else if (event.key === 'Escape') proving.toRow(requirement.id);
+  };
+  return (
+    <div className="flex flex-wrap items-end gap-2">
+      <TextField
+        className="min-w-40 flex-1"
+        label="The certificate states"
+        mono
+        data-key="e"
+        data-key-says="Edit what it states"
+        value={stated}
+        maxLength={300}
+        onChange={(event) => setStated(event.currentTarget.value)}
+        onKeyDown={onKeyDown}
+      />
+      <Button look="outlined" onClick={() => judge('meets')}>
+        Meets
+      </Button>
+      <Button onClick={() => judge('does_not_meet')} shortcut="X">
+        Does not meet
+      </Button>
+      <Button onClick={() => judge('not_stated')} shortcut="N">
+        Not stated
+      </Button>
+      <Button onClick={() => judge('cannot_tell')} shortcut="C">
+        Cannot tell
+      </Button>
+    </div>
+  );
+}
+
+function whatIsWrong(requirement: ProvedRequirement): string {
+  const { characteristic, decision } = requirement;
+  const ordered = limitWords(requirement);
+  if (!decision) return `${characteristic}: ordered ${ordered}`;
+  const says = { meets: `states ${decision.stated}`, does_not_meet: `states ${decision.stated}`, not_stated: 'does not state it', cannot_tell: 'cannot be read there' }[decision.verdict];
+  return `${characteristic}: ordered ${ordered || 'to be stated'}, the certificate ${says}`;
+}
+
+const questionOf = (requirement: ProvedRequirement): string => `${whatIsWrong(requirement)}. Send a corrected certificate.`;
