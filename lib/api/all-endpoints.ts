@@ -4,12 +4,14 @@ import * as batches from '@/lib/batches/endpoints';
 import * as certificates from '@/lib/certificates/endpoints';
 import * as dossiers from '@/lib/dossiers/endpoints';
 import * as files from '@/lib/files/endpoints';
+import * as invoices from '@/lib/invoices/endpoints';
 import * as jobs from '@/lib/jobs/endpoints';
 import * as lots from '@/lib/lots/endpoints';
 import * as messages from '@/lib/messages/endpoints';
 import * as nonconformances from '@/lib/nonconformances/endpoints';
 import * as organisations from '@/lib/organisations/endpoints';
 import * as parts from '@/lib/parts/endpoints';
+import * as payments from '@/lib/payments/endpoints';
 import * as people from '@/lib/people/endpoints';
 import * as portal from '@/lib/portal/endpoints';
 import * as batchLinks from '@/lib/portal/link-endpoints';
@@ -23,4 +25,4 @@ import * as tideline from '@/lib/tideline/endpoints';
 import type { Endpoint } from './endpoint';
 
 /** Every read and write there is: what the documentation and the walk over all permissions go by. */
-export const ALL_ENDPOINTS: readonly Endpoint[] = [assemblies, audit, batchLinks, batches, certificates, dossiers, files, jobs, lots, messages, nonconformances, organisations, parts, people, portal, processors, receipts, search, session, stock, tideline].flatMap((domain) => Object.values(domain) as unknown as Endpoint[]);
+export const ALL_ENDPOINTS: readonly Endpoint[] = [assemblies, audit, batchLinks, batches, certificates, dossiers, files, invoices, jobs, lots, messages, nonconformances, organisations, parts, payments, people, portal, processors, receipts, search, session, stock, tideline].flatMap((domain) => Object.values(domain) as unknown as Endpoint[]);

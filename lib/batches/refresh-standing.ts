@@ -53,7 +53,7 @@ export async function readFacts(ctx: Pick<Ctx, 'tx'>, batchId: string): Promise<
       select coalesce(sum(b.pieces), 0)::int as pieces from nonconformances n join balances b on b.lot_id = n.lot_id and b.place = 'hold' and b.holder_id = n.id where n.batch_id = ${batchId}
     ), money as (
       select count(*)::int as invoices,
-        coalesce(bool_and(i.approved_at is not null and coalesce((select sum(m.amount_minor) from money_entries m where m.invoice_id = i.id), 1) <= 0), false) as settled
+        coalesce(bool_and(i.approved_at is not null and coalesce((select sum(m.amount_minor) from money_entries m where m.invoice_id = i.id), 0) <= 0), false) as settled
       from invoices i where i.batch_id = ${batchId} and i.refused_at is null
     ), promise as (
       select (array_agg(p.promised_on::text order by p.made_at, p.id))[1] as first, (array_agg(p.promised_on::text order by p.made_at desc, p.id desc))[1] as latest

@@ -6,6 +6,9 @@ import { STAGES } from '@/lib/batches/stage';
 import { Currency, Minor } from '@/lib/money';
 
 export const INVOICE_LINE_KINDS = ['pieces', 'lot_minimum', 'certification', 'freight', 'tax', 'other'] as const;
+/** Which of them a list shows: what asks for something, what is done with. */
+export const INVOICE_VIEWS = ['open', 'paid', 'refused', 'all'] as const;
+export type InvoiceView = (typeof INVOICE_VIEWS)[number];
 /** What is to be done with it next; follows from its records by `invoiceState`. */
 export const INVOICE_STATES = ['to_enter', 'to_clear', 'to_approve', 'second_approval', 'to_pay', 'paying', 'payment_failed', 'paid', 'refused'] as const;
 
@@ -48,7 +51,7 @@ export const listInvoices = declare({
   summary: 'Invoices, newest first',
   side: 'shop',
   permission: 'invoice.read',
-  input: PageQuery.extend({ batchId: Id.optional(), open: z.enum(['yes']).optional() }),
+  input: PageQuery.extend({ after: Id.optional(), batchId: Id.optional(), show: z.enum(INVOICE_VIEWS).default('all') }),
   response: pageOf(InvoiceRow),
 });
 
@@ -62,16 +65,20 @@ export const InvoiceDifference = z.object({
 });
 export type InvoiceDifference = z.output<typeof InvoiceDifference>;
 
+const Approval = z.object({ by: z.string(), at: Moment, byMe: z.boolean() });
+
 export const InvoiceDetail = InvoiceRow.extend({
   version: z.int(),
-  fileId: Id.nullable(),
+  /** The page as it was received. */
+  file: z.object({ id: Id, name: z.string(), size: z.int(), mediaType: z.string() }).nullable(),
   sentBy: z.string(),
   refusedReason: z.string().nullable(),
   /** Null until the invoice is entered. */
   toPayMinor: z.int().nullable(),
   withheldMinor: z.int(),
-  approved: z.object({ by: z.string(), at: Moment }).nullable(),
-  secondApproved: z.object({ by: z.string(), at: Moment }).nullable(),
+  approved: Approval.nullable(),
+  secondApproved: Approval.nullable(),
+  needsSecond: z.boolean(),
   secondApprovalAboveMinor: z.int().nullable(),
   lines: z.array(z.object({ seq: z.int(), kind: z.enum(INVOICE_LINE_KINDS), lineId: Id.nullable(), description: z.string(), pieces: z.int().nullable(), unitPriceMinor: z.int().nullable(), amountMinor: z.int() })),
   order: z.object({
@@ -82,11 +89,13 @@ export const InvoiceDetail = InvoiceRow.extend({
     lines: z.array(z.object({ lineId: Id, lineNo: z.int(), partNumber: z.string(), partRevision: z.string(), partName: z.string(), ordered: z.int(), unitPriceMinor: z.int(), accepted: z.int() })),
   }),
   differences: z.array(InvoiceDifference),
+  /** Signed certificates of the batch, with the pieces they cover. */
+  papers: z.array(z.object({ id: Id, number: z.string().nullable(), pieces: z.int() })),
   seenBefore: z.array(z.object({ id: Id, number: z.string().nullable(), batchNumber: z.string(), why: z.enum(['same_number', 'same_order', 'same_total', 'same_file']) })),
-  payments: z.array(z.object({ id: Id, attempt: z.int(), amountMinor: z.int(), state: z.enum(['pending', 'succeeded', 'failed', 'refunded']), failure: z.string().nullable(), by: z.string(), startedAt: Moment, endedAt: Moment.nullable() })),
+  payments: z.array(z.object({ id: Id, attempt: z.int(), amountMinor: z.int(), state: z.enum(['pending', 'succeeded', 'failed', 'refunded']), failure: z.string().nullable(), handedOver: z.boolean(), by: z.string(), startedAt: Moment, endedAt: Moment.nullable() })),
   entries: z.array(z.object({ kind: z.enum(['invoiced', 'withheld', 'credited', 'paid', 'refunded']), amountMinor: z.int(), by: z.string(), at: Moment })),
-  /** Why it cannot be paid although it is approved; null where it can. */
-  payable: z.object({ methodSaved: z.boolean(), processorReady: z.boolean() }),
+  /** What paying needs besides the approval. `otherHands`: the shop refuses that who approved also pays, and I approved. */
+  payable: z.object({ methodSaved: z.boolean(), processorReady: z.boolean(), otherHands: z.boolean() }),
 });
 export type InvoiceDetail = z.output<typeof InvoiceDetail>;
 

@@ -45,6 +45,19 @@ export type DifferenceCode =
   | 'fee_not_agreed'
   | 'not_on_order';
 
+/** Each in short, where the figures it was named with are no longer at hand. */
+export const DIFFERENCE_WORDS: Partial<Record<string, string>> = {
+  currency_mismatch: 'Another currency than the order.',
+  arithmetic: 'The total was not the sum of the lines.',
+  line_arithmetic: 'Pieces at their price were not the amount of the line.',
+  unit_price_mismatch: 'The price was over the order.',
+  quantity_above_accepted: 'More pieces than were accepted.',
+  line_twice: 'A line of the order was invoiced twice.',
+  lot_minimum_mismatch: 'More than was missing to the lot minimum.',
+  fee_not_agreed: 'More for the papers than was agreed.',
+  not_on_order: 'Not on the order.',
+} satisfies Record<DifferenceCode, string>;
+
 /** One named difference. `overMinor` is what would not be paid if it is withheld; 0 where it can only be corrected. */
 export interface Difference {
   /** Stable while the invoice is entered as it is: `quantity_above_accepted:3`. */

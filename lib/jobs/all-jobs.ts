@@ -1,7 +1,9 @@
 import { assembleDossierJob } from './definitions/assemble-dossier';
+import { payInvoiceJob } from './definitions/pay-invoice';
 import { renderDocumentsJob } from './definitions/render-documents';
 import { sendMailJob } from './definitions/send-mail';
+import { workPaymentEventJob } from './definitions/work-payment-event';
 import type { Job } from './job';
 
 /** What the worker runs: one job for each queue of `queues.ts`; a test compares the two. */
-export const ALL_JOBS: readonly Job[] = [sendMailJob, renderDocumentsJob, assembleDossierJob];
+export const ALL_JOBS: readonly Job[] = [sendMailJob, renderDocumentsJob, assembleDossierJob, payInvoiceJob, workPaymentEventJob];

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { approveInvoiceSecondEndpoint } from '@/lib/invoices/endpoints';
+
+export const POST = serve(approveInvoiceSecondEndpoint);

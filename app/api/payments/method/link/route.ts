@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { linkPayingMethodEndpoint } from '@/lib/payments/endpoints';
+
+export const POST = serve(linkPayingMethodEndpoint);

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { getPayingMethodEndpoint } from '@/lib/payments/endpoints';
+
+export const GET = serve(getPayingMethodEndpoint);
