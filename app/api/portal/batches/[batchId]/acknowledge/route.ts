@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { acknowledgeBatchEndpoint } from '@/lib/portal/endpoints';
+
+export const POST = serve(acknowledgeBatchEndpoint);

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { markDoneEndpoint } from '@/lib/portal/endpoints';
+
+export const POST = serve(markDoneEndpoint);

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { getPortalBatchEndpoint } from '@/lib/portal/endpoints';
+
+export const GET = serve(getPortalBatchEndpoint);
