@@ -40,7 +40,9 @@ const rules = [
       '@typescript-eslint/no-floating-promises': 'error',
       // An async handler on an event is how React is written; its refusals are caught by the query client.
       '@typescript-eslint/no-misused-promises': ['error', { checksVoidReturn: { attributes: false } }],
-      '@typescript-eslint/consistent-type-imports': ['error', { fixStyle: 'inline-type-imports' }],
+      '@typescript-eslint/consistent-type-imports': 'error',
+      // `import { type X }` still loads the file; in the browser that may be half of the server.
+      '@typescript-eslint/no-import-type-side-effects': 'error',
       '@typescript-eslint/switch-exhaustiveness-check': [
         'error',
         { considerDefaultExhaustiveForUnions: true, requireDefaultForNonUnion: true },

@@ -1,6 +1,6 @@
-import { type Metadata, type Viewport } from 'next';
+import type { Metadata, Viewport } from 'next';
 import { cookies } from 'next/headers';
-import { type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 import { Messages } from '@/components/ui/message';
 import { LOOK_COOKIE, readLook } from '@/components/shell/look';
 import { fontVariables } from './fonts';

@@ -1,6 +1,6 @@
 'use client';
 
-import { type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 import { FileDrop } from '@/components/ui/file-drop';
 import { acceptedFiles } from '@/lib/files/kinds';
 import type { FileView } from '@/lib/files/contract';

@@ -1,9 +1,9 @@
 import Link from 'next/link';
-import { type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 import { BrandMark } from '@/components/ui/marks';
 import { PersonMenu } from './person-menu';
 import { SectionNav } from './section-nav';
-import { type SectionLink } from './sections';
+import type { SectionLink } from './sections';
 
 export interface AppHeadProps {
   /** The shop, or the processor on its own side. */

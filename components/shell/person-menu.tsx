@@ -1,4 +1,4 @@
-import { type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 
 interface PersonMenuProps {
   /** Over the name: the shop, or the processor. */

@@ -4,7 +4,7 @@ import Link from 'next/link';
 import { type ReactNode, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Checkbox, RadioGroup } from '@/components/ui/choice';
-import { type Look } from './look';
+import type { Look } from './look';
 import { keepLook, keepSingleKeys } from './preferences';
 
 export interface PersonPanelProps {

@@ -1,4 +1,4 @@
-import { type ComponentProps, type ReactNode } from 'react';
+import type { ComponentProps, ReactNode } from 'react';
 import { NoNetwork } from '@/components/ui/no-network';
 import { PortalHead } from './portal-head';
 import { SkipLink } from './skip-link';

@@ -1,5 +1,5 @@
 import Link from 'next/link';
-import { type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 import { BrandMark } from '@/components/ui/marks';
 
 /** Before one has signed in. */

@@ -1,4 +1,4 @@
-import { type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 import { Keys } from '@/components/ui/keys';
 import { NoNetwork } from '@/components/ui/no-network';
 import { AppHead, type AppHeadProps } from './app-head';

@@ -1,4 +1,4 @@
-import { type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 import { type CheckLevel, CheckMark, VerdictMark } from './marks';
 
 interface CheckRowProps {

@@ -1,5 +1,5 @@
-import { type ReactNode } from 'react';
-import { type CheckLevel } from './marks';
+import type { ReactNode } from 'react';
+import type { CheckLevel } from './marks';
 
 interface EdgeProps {
   level: CheckLevel;

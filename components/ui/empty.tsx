@@ -1,4 +1,4 @@
-import { type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 
 interface EmptyProps {
   /** What is not here: "No lot waits for anodize." */

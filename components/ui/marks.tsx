@@ -1,5 +1,5 @@
-import { type ReactNode } from 'react';
-import { type Stage } from '@/lib/batches/stage';
+import type { ReactNode } from 'react';
+import type { Stage } from '@/lib/batches/stage';
 
 const PAPER = 'var(--mkp,var(--paper))';
 

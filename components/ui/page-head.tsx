@@ -1,4 +1,4 @@
-import { type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 
 interface PageHeadProps {
   /** Either the tag of a batch (46 px), or a title. */

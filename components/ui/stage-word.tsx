@@ -1,4 +1,4 @@
-import { type Stage } from '@/lib/batches/stage';
+import type { Stage } from '@/lib/batches/stage';
 import { StageMark } from './marks';
 import { STAGE_TONES, STAGE_WORDS } from './stages';
 

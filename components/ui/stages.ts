@@ -1,4 +1,4 @@
-import { type Stage } from '@/lib/batches/stage';
+import type { Stage } from '@/lib/batches/stage';
 
 /** What a stage is called on the screen. */
 export const STAGE_WORDS: Record<Stage, string> = {

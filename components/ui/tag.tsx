@@ -1,5 +1,5 @@
 import Link from 'next/link';
-import { type Stage } from '@/lib/batches/stage';
+import type { Stage } from '@/lib/batches/stage';
 import { StageMark } from './marks';
 import { STAGE_TONES, STAGE_WORDS } from './stages';
 

@@ -3,7 +3,7 @@ import { existsSync, readdirSync, readFileSync, statSync, writeFileSync } from '
 import { join } from 'node:path';
 import { CannotStart } from '@/db/cannot-start';
 import { runToEnd } from './run-to-end';
-import { type StackSettings } from './settings';
+import type { StackSettings } from './settings';
 
 /** What ends up in the web server; a change anywhere else needs no new build. */
 const SOURCES = [

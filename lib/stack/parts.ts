@@ -1,5 +1,5 @@
 import { join } from 'node:path';
-import { type StackSettings } from './settings';
+import type { StackSettings } from './settings';
 
 /** One process of the stack: how to start it and how to know that it is up. */
 export interface Part {

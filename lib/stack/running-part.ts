@@ -3,7 +3,7 @@ import { createWriteStream, existsSync, mkdirSync, readFileSync } from 'node:fs'
 import { createServer } from 'node:net';
 import { dirname } from 'node:path';
 import { CannotStart } from '@/db/cannot-start';
-import { type Part } from './parts';
+import type { Part } from './parts';
 
 const GRACE_MS = 8_000;
 

@@ -9,7 +9,7 @@ import { prepareDatabase } from './prepare-database';
 import { claimRun } from './run-record';
 import { endAllRuns } from './run-to-end';
 import { answers, demandFreePorts, lastLines, type RunningPart, startPart } from './running-part';
-import { type StackSettings } from './settings';
+import type { StackSettings } from './settings';
 
 export interface StackOptions {
   readonly settings: StackSettings;
