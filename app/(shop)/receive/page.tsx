@@ -1,0 +1,15 @@
+import type { Metadata } from 'next';
+
+import { ask, Prefetched } from '@/app/_kit/prefetch';
+import { ScanBatch } from '@/components/receipts/scan-batch';
+import { listBatchesEndpoint } from '@/lib/batches/endpoints';
+
+export const metadata: Metadata = { title: 'Count in' };
+
+export default function ReceivePage() {
+  return (
+    <Prefetched queries={[ask(listBatchesEndpoint, { stage: 'at_processor', limit: 50 }), ask(listBatchesEndpoint, { stage: 'dispatched', limit: 50 })]}>
+      <ScanBatch />
+    </Prefetched>
+  );
+}
