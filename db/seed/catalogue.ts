@@ -33,14 +33,14 @@ const step = (process: PartInput['route'][number]['process'], specification: str
 
 // Limits below are the demonstration's own; they illustrate an order and are no reference values.
 const SOLUTION_2024 = step('solution_heat_treat_and_age', 'AMS 2770', 'R', 'natural age', 'O', 'T42', [prove('Solution temperature', '910 to 930', '°F'), prove('Quench delay', '10 or less', 's'), prove('Hardness', 'HRB 63 or more'), prove('Conductivity', '28.5 to 32.5', '% IACS')]);
-const SOLUTION_6061 = step('solution_heat_treat_and_age', 'AMS 2770', 'R', 'artificial age', 'O', 'T62', [prove('Solution temperature', '980 to 1000', '°F'), prove('Age', '345 to 355, 8 h', '°F'), prove('Hardness', 'HRE 85 or more')]);
+const SOLUTION_6061 = step('solution_heat_treat_and_age', 'AMS 2770', 'R', 'artificial age', 'O', 'T62', [prove('Solution temperature', '980 to 1000', '°F'), prove('Age', '345 to 355 °F, 8 h'), prove('Hardness', 'HRE 85 or more')]);
 const SOLUTION_7075 = step('solution_heat_treat_and_age', 'AMS 2770', 'R', 'artificial age', 'O', 'T62', [prove('Solution temperature', '870 to 880', '°F'), prove('Quench delay', '10 or less', 's'), prove('Hardness', 'HRB 84 or more'), prove('Conductivity', '30.5 to 36.0', '% IACS')]);
 const HARDEN_4340 = step('harden_and_temper', 'AMS 2759/1', 'H', '160 to 180 ksi', 'annealed', '160 to 180 ksi', [prove('Hardness', 'HRC 36 to 40'), prove('Tempering temperature', 'on the chart', '°F')]);
 const AGE_174 = step('artificial_age', 'AMS 2759/3', 'K', 'H1025', 'A', 'H1025', [prove('Hardness', 'HRC 35 to 42')]);
 const NORMALIZE_RELIEF = step('stress_relief', 'AMS 2759/11', 'B', 'welded', 'N', 'N', [prove('Temperature and time', 'on the chart')]);
 const ANODIZE = step('anodize', 'MIL-PRF-8625', 'F', 'type II class 1', '', '', [prove('Coating weight', '600 or more', 'mg/ft²'), prove('Salt spray', 'panel of this month', '', 'specification')]);
 const FILM = step('chemical_film', 'MIL-DTL-5541', 'F', 'type II class 1A', '', '', [prove('Appearance', 'continuous, no powder'), prove('Salt spray', 'panel of this month')]);
-const CADMIUM = step('cadmium_plate', 'AMS-QQ-P-416', 'F', 'type II class 2', '', '', [prove('Thickness', '0.0003 to 0.0005', 'in'), prove('Bake start', '4 h or less after plating', 'h'), prove('Bake', '375 ± 25 °F, 23 h', 'h')]);
+const CADMIUM = step('cadmium_plate', 'AMS-QQ-P-416', 'F', 'type II class 2', '', '', [prove('Thickness', '0.0003 to 0.0005', 'in'), prove('Bake start', '4 or less after plating', 'h'), prove('Bake', '375 ± 25 °F, 23 h')]);
 const PASSIVATE = step('passivation', 'AMS 2700', 'F', 'method 1', '', '', [prove('Copper sulfate test', 'passed')]);
 const PENETRANT = step('fluorescent_penetrant', 'ASTM E1417', '21', 'type I, level 3', '', '', [prove('Result', 'no relevant indications'), prove('Inspector', 'level 2 or 3, named')]);
 const MAGNETIC = step('magnetic_particle', 'ASTM E1444', '22', 'wet fluorescent', '', '', [prove('Result', 'no relevant indications'), prove('Inspector', 'level 2 or 3, named')]);

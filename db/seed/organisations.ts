@@ -21,6 +21,8 @@ export interface DemoProcessor {
   id: string;
   name: string;
   contact: string;
+  /** Who sits at its desk. */
+  personId: string;
   processes: readonly Process[];
 }
 
@@ -69,12 +71,12 @@ export async function seedOrganisations(owner: OwnerDb, { since, today }: { sinc
     const id = newId();
     const email = `desk@${domain}`;
     await owner.insert(processors).values({ id, name, email, phone: '555 0112', address: ['Works Road', 'Tamarack Junction'], zone: 'America/Vancouver', createdAt: since });
-    await person(contact, email, ['processor'], { processorId: id });
+    const desk = await person(contact, email, ['processor'], { processorId: id });
     for (const [shop, reference] of [[shopId, 'Q-114'], [otherShopId, 'AP-7']] as const) {
       await owner.insert(shopProcessors).values({ shopId: shop, processorId: id, contactName: contact, contactEmail: email, createdAt: since });
       await owner.insert(approvals).values({ shopId: shop, processorId: id, reference: `${reference}-${id.slice(-3)}`, processes: [...processes], validFrom: dayOf(since), validTo: dayOf(addDays(today, validDays)), createdAt: since });
     }
-    return { id, name, contact, processes };
+    return { id, name, contact, personId: desk.id, processes };
   };
 
   return {

@@ -1,7 +1,7 @@
 import { and, asc, eq, inArray, isNull } from 'drizzle-orm';
 import type { z } from 'zod';
 
-import { batchDocuments } from '@/db/schema/batches';
+import { batches, batchDocuments } from '@/db/schema/batches';
 import type { Ctx } from '@/lib/auth/context';
 import { batchLinkToken } from '@/lib/batches/batch-link-token';
 import { storeMadeFile } from '@/lib/files/store-made-file';
@@ -11,6 +11,14 @@ import { queueBatchMail } from '@/lib/portal/queue-batch-mail';
 
 import { PaperContent } from './content';
 import type { renderDocumentsQueue } from './render-documents-queue';
+
+interface Made {
+  id: string;
+  name: string;
+  content: PaperContent;
+  fileId: string;
+  sha256: string;
+}
 
 type Payload = z.output<typeof renderDocumentsQueue.payload>;
 
@@ -22,11 +30,12 @@ type Payload = z.output<typeof renderDocumentsQueue.payload>;
  */
 export async function renderAndSend(tools: JobTools, { shopId, batchId, documentIds, mail }: Payload): Promise<void> {
   const awaited = await tools.inShop(shopId, (ctx) => readAwaited(ctx, documentIds));
-  const made: { id: string; fileId: string; sha256: string }[] = [];
+  const made: Made[] = [];
   for (const document of awaited) {
     const content = PaperContent.parse(document.content);
-    const kept = await storeMadeFile(tools, { shopId, batchId, purpose: content.kind, name: fileName(content), mediaType: 'application/pdf', content: await renderPaper(content, batchLinkToken) });
-    made.push({ id: document.id, ...kept });
+    const name = fileName(content);
+    const kept = await storeMadeFile(tools, { shopId, batchId, purpose: content.kind, name, mediaType: 'application/pdf', content: await renderPaper(content, batchLinkToken) });
+    made.push({ id: document.id, name, content, ...kept });
   }
   await tools.inShop(shopId, async (ctx) => {
     let recorded = 0;
@@ -35,7 +44,7 @@ export async function renderAndSend(tools: JobTools, { shopId, batchId, document
       const rows = await ctx.tx.update(batchDocuments).set({ fileId, sha256 }).where(and(eq(batchDocuments.id, id), isNull(batchDocuments.fileId))).returning({ id: batchDocuments.id });
       recorded += rows.length;
     }
-    if (recorded > 0) await sendMail(ctx, batchId, awaited, mail);
+    if (recorded > 0) await sendMail(ctx, batchId, made, mail);
   });
 }
 
@@ -46,13 +55,15 @@ const readAwaited = (ctx: Ctx, documentIds: readonly string[]) =>
     .where(and(inArray(batchDocuments.id, [...documentIds]), isNull(batchDocuments.fileId)))
     .orderBy(asc(batchDocuments.id));
 
-async function sendMail(ctx: Ctx, batchId: string, documents: readonly { content: unknown }[], mail: Payload['mail']): Promise<void> {
-  const traveller = documents.map(({ content }) => PaperContent.parse(content)).find((content) => content.kind === 'traveller');
-  if (!traveller?.link) return;
-  const url = `${traveller.link.base}${batchLinkToken(traveller.link.linkId)}`;
-  const version = traveller.documentVersion;
-  if (mail === 'dispatch') return queueBatchMail(ctx, batchId, { template: 'dispatch', url, version });
-  return queueBatchMail(ctx, batchId, { template: 'dispatch-reissued', url, version, changes: traveller.changes });
+/** Nothing is sent about a batch that was cancelled meanwhile: the word that it is off is on its way already. */
+async function sendMail(ctx: Ctx, batchId: string, made: readonly Made[], mail: 'dispatch' | 'reissue'): Promise<void> {
+  const [batch] = await ctx.tx.select({ cancelledAt: batches.cancelledAt }).from(batches).where(eq(batches.id, batchId));
+  const traveller = made.map(({ content }) => content).find((content) => content.kind === 'traveller');
+  if (!batch || batch.cancelledAt !== null || !traveller) return;
+  const link = traveller.link && { url: `${traveller.link.base}${batchLinkToken(traveller.link.linkId)}` };
+  const carried = { ...link, version: traveller.documentVersion, papers: made.map(({ fileId, name }) => ({ fileId, name })) };
+  if (mail === 'dispatch') return queueBatchMail(ctx, batchId, { template: 'dispatch', ...carried });
+  return queueBatchMail(ctx, batchId, { template: 'dispatch-reissued', changes: traveller.changes, ...carried });
 }
 
 function fileName({ kind, number, orderNumber, documentVersion }: PaperContent): string {

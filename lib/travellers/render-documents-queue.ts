@@ -7,7 +7,7 @@ export const renderDocumentsQueue = {
     shopId: z.uuid(),
     batchId: z.uuid(),
     documentIds: z.array(z.uuid()).min(1),
-    /** Which mail they go with. */
-    mail: z.enum(['dispatch', 'reissue']),
+    /** Which mail they go with; `none` where they are only made, as for batches that were entered afterwards. */
+    mail: z.enum(['dispatch', 'reissue', 'none']),
   }),
 };
