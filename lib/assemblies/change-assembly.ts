@@ -1,11 +1,11 @@
-import { and, eq } from 'drizzle-orm';
+import { and, eq, isNull } from 'drizzle-orm';
 import type { z } from 'zod';
 
 import { assemblies, assemblyNeeds } from '@/db/schema/parts';
 import { recordAudit } from '@/lib/audit/record-audit';
 import { authorize } from '@/lib/auth/authorize';
 import { shopOf, type Ctx } from '@/lib/auth/context';
-import { AppError, changedMeanwhile } from '@/lib/errors';
+import { AppError, changedMeanwhile, notFound } from '@/lib/errors';
 import { newId } from '@/lib/ids';
 
 import type * as contract from './contract';
@@ -28,6 +28,9 @@ export async function updateAssembly(ctx: Ctx, { assemblyId, version, needs, ...
   authorize(ctx, 'assembly.edit');
   await refuseSameName(ctx, fields.name, assemblyId);
   const before = (await readNeeds(ctx)).filter((need) => need.assemblyId === assemblyId);
+  const [was] = await ctx.tx.select({ name: assemblies.name, neededOn: assemblies.neededOn, note: assemblies.note, closedAt: assemblies.closedAt }).from(assemblies).where(eq(assemblies.id, assemblyId));
+  if (!was) throw notFound('assembly');
+  if (was.closedAt !== null) throw new AppError('conflict', `${was.name} is closed. It waits for nothing more.`);
   const [changed] = await ctx.tx
     .update(assemblies)
     .set({ ...fields, version: version + 1 })
@@ -36,7 +39,7 @@ export async function updateAssembly(ctx: Ctx, { assemblyId, version, needs, ...
   if (!changed) throw changedMeanwhile('assembly');
   refuseLessThanFitted(before, needs);
   await writeNeeds(ctx, assemblyId, needs);
-  await recordAudit(ctx, { action: 'assembly.update', entity: 'assembly', entityId: assemblyId, before: { needs: before.map(({ partNumber, pieces }) => ({ partNumber, pieces })) }, after: { ...fields, needs } });
+  await recordAudit(ctx, { action: 'assembly.update', entity: 'assembly', entityId: assemblyId, before: { name: was.name, neededOn: was.neededOn, note: was.note, needs: before.map(({ partNumber, pieces }) => ({ partNumber, pieces })) }, after: { ...fields, needs } });
   return changed;
 }
 
@@ -45,7 +48,7 @@ export async function closeAssembly(ctx: Ctx, { assemblyId, version }: { assembl
   const [closed] = await ctx.tx
     .update(assemblies)
     .set({ closedAt: ctx.now, version: version + 1 })
-    .where(and(eq(assemblies.id, assemblyId), eq(assemblies.version, version)))
+    .where(and(eq(assemblies.id, assemblyId), eq(assemblies.version, version), isNull(assemblies.closedAt)))
     .returning({ name: assemblies.name });
   if (!closed) throw changedMeanwhile('assembly');
   await recordAudit(ctx, { action: 'assembly.close', entity: 'assembly', entityId: assemblyId, after: closed });

@@ -1,8 +1,9 @@
 import { z } from 'zod';
 
 import { declare } from '@/lib/api/endpoint';
-import { Day, Done, Id, Pieces } from '@/lib/api/shapes';
+import { Day, Done, Id, Moment, Pieces } from '@/lib/api/shapes';
 import { STAGES } from '@/lib/batches/stage';
+import { PROCESSES } from '@/lib/parts/process';
 
 const Need = z.object({ partNumber: z.string().trim().min(1, 'Enter the part number.').max(80), pieces: Pieces });
 
@@ -22,19 +23,33 @@ const Fields = z.object({
   needs: Needs,
 });
 
-const Wait = z.object({ id: Id, number: z.string(), stage: z.enum(STAGES), pieces: z.int(), promisedOn: z.string().nullable() });
+/** A batch that carries a part, with where its pieces of that part are. */
+export const Wait = z.object({
+  id: Id,
+  number: z.string(),
+  stage: z.enum(STAGES),
+  processor: z.string(),
+  promisedOn: z.string().nullable(),
+  /** All below together. */
+  pieces: z.int(),
+  packed: z.int(),
+  away: z.int(),
+  back: z.int(),
+  held: z.int(),
+});
+export type Wait = z.output<typeof Wait>;
 
-export const AssemblyRow = z.object({ id: Id, name: z.string(), neededOn: z.string().nullable(), needed: z.int(), ready: z.int(), batches: z.array(Wait) });
+export const AssemblyRow = z.object({ id: Id, name: z.string(), neededOn: z.string().nullable(), needed: z.int(), ready: z.int(), closedAt: Moment.nullable(), batches: z.array(Wait) });
 export type AssemblyRow = z.output<typeof AssemblyRow>;
 
 export const listAssemblies = declare({
   id: 'listAssemblies',
   method: 'get',
   path: '/assemblies',
-  summary: 'Open assemblies, earliest need first, with how far each is',
+  summary: 'Open assemblies, earliest need first, with how far each is; or those closed last',
   side: 'shop',
   permission: 'assembly.read',
-  input: z.object({}),
+  input: z.object({ closed: z.enum(['0', '1']).default('0') }),
   response: z.object({ today: z.string(), rows: z.array(AssemblyRow) }),
 });
 
@@ -49,7 +64,10 @@ export const AssemblyNeedRow = z.object({
   /** Lots in stock that could be issued now. */
   stock: z.array(z.object({ lotId: Id, lotNumber: z.string(), locationId: Id, location: z.string(), pieces: z.int() })),
   batches: z.array(Wait),
-  making: z.int(),
+  /** In the yard, not on any batch, by the outside step they wait for. */
+  waiting: z.array(z.object({ process: z.enum(PROCESSES), pieces: z.int() })),
+  /** Which lots went into it. */
+  fittedLots: z.array(z.object({ lotId: Id, lotNumber: z.string(), pieces: z.int(), serials: z.array(z.string()) })),
 });
 export type AssemblyNeedRow = z.output<typeof AssemblyNeedRow>;
 

@@ -11,8 +11,14 @@ interface BatchWait {
   id: string;
   number: string;
   stage: Stage;
-  pieces: number;
+  processor: string;
   promisedOn: string | null;
+  /** Pieces of the part that are on the batch now: packed, away, back and held together. */
+  pieces: number;
+  packed: number;
+  away: number;
+  back: number;
+  held: number;
 }
 
 export interface Readiness {
@@ -35,10 +41,19 @@ export async function readReadiness(ctx: Pick<Ctx, 'tx'>): Promise<Readiness[]> 
     row.needed += need.pieces;
     row.ready += ready[at] ?? 0;
     // A part that is ready waits for no batch, even if more of it is under way.
-    if ((ready[at] ?? 0) < need.pieces) row.batches.push(...waits.filter((wait) => wait.partNumber === need.partNumber && !row.batches.some((known) => known.id === wait.id)));
+    if ((ready[at] ?? 0) < need.pieces) addWaits(row, waits.filter((wait) => wait.partNumber === need.partNumber));
     byAssembly.set(need.assemblyId, row);
   });
   return [...byAssembly.values()];
+}
+
+/** A batch that carries two of its parts stands once, with the pieces of both. */
+function addWaits(row: Readiness, waits: readonly BatchWait[]): void {
+  for (const { id, number, stage, processor, promisedOn, ...counts } of waits) {
+    const known = row.batches.find((one) => one.id === id);
+    if (!known) row.batches.push({ id, number, stage, processor, promisedOn, pieces: counts.pieces, packed: counts.packed, away: counts.away, back: counts.back, held: counts.held });
+    else for (const count of ['pieces', 'packed', 'away', 'back', 'held'] as const) known[count] += counts[count];
+  }
 }
 
 /** Needs of open assemblies with what is fitted of each, in the order in which stock is shared out. */
@@ -61,13 +76,22 @@ export async function readStock(ctx: Pick<Ctx, 'tx'>): Promise<Map<string, numbe
   return new Map(rows.map((row) => [row.number, row.pieces]));
 }
 
-/** Batches on their way that carry a part some open assembly needs, soonest promise first. */
+/** Batches on their way that carry a part some open assembly needs, soonest promise first. Pieces that passed the gate are not on the batch any more. */
 export async function readWaits(ctx: Pick<Ctx, 'tx'>): Promise<(BatchWait & { partNumber: string })[]> {
   const { rows } = await ctx.tx.execute<BatchWait & { partNumber: string } & Record<string, unknown>>(sql`
-    select b.id, b.number, b.stage, sum(l.pieces)::int as pieces, b.promised_on::text as "promisedOn", p.number as "partNumber"
-    from batches b join batch_lines l on l.batch_id = b.id join lots o on o.id = l.lot_id join parts p on p.id = o.part_id
-    where b.stage in ('building', 'dispatched', 'at_processor', 'returned', 'proved', 'settled', 'held')
+    select b.id, b.number, b.stage, r.name as processor, b.promised_on::text as "promisedOn", p.number as "partNumber", sum(k.pieces)::int as pieces,
+      coalesce(sum(k.pieces) filter (where k.place = 'packed'), 0)::int as packed,
+      coalesce(sum(k.pieces) filter (where k.place in ('transit_out', 'at_processor', 'transit_back')), 0)::int as away,
+      coalesce(sum(k.pieces) filter (where k.place = 'quarantine'), 0)::int as back,
+      coalesce(sum(k.pieces) filter (where k.place = 'hold'), 0)::int as held
+    from batches b join processors r on r.id = b.processor_id join batch_lines l on l.batch_id = b.id join lots o on o.id = l.lot_id join parts p on p.id = o.part_id
+    cross join lateral (
+      select h.place, h.pieces from balances h where h.lot_id = l.lot_id and h.holder_id = l.id and h.place in ('packed', 'transit_out', 'at_processor', 'transit_back', 'quarantine')
+      union all
+      select h.place, h.pieces from nonconformances n join balances h on h.lot_id = n.lot_id and h.place = 'hold' and h.holder_id = n.id where n.line_id = l.id
+    ) k
+    where b.stage in ('building', 'dispatched', 'at_processor', 'returned', 'proved', 'settled', 'held') and k.pieces > 0
       and p.number in (select n.part_number from assembly_needs n join assemblies a on a.id = n.assembly_id where a.closed_at is null)
-    group by b.id, p.number order by b.promised_on nulls last, b.id`);
+    group by b.id, r.name, p.number order by b.promised_on nulls last, b.id`);
   return rows;
 }

@@ -3,17 +3,40 @@ import type { z } from 'zod';
 
 import { dossiers } from '@/db/schema/evidence';
 import { recordAudit } from '@/lib/audit/record-audit';
+import { AppError } from '@/lib/errors';
 import { storeMadeFile } from '@/lib/files/store-made-file';
 import type { JobTools } from '@/lib/jobs/job';
 import { getObject } from '@/lib/storage/object-store';
 
 import type { assembleDossierQueue } from './assemble-dossier-queue';
-import { makeArchive } from './make-archive';
+import { ChangedOriginal, makeArchive } from './make-archive';
 import { readDossier } from './read-dossier';
 import { renderDossier } from './render-dossier';
 
-/** Makes the document and the archive of a dossier that was asked for. Run again, it finds what it made before. */
-export async function assembleDossier(tools: JobTools, { shopId, dossierId }: z.output<typeof assembleDossierQueue.payload>): Promise<void> {
+type Payload = z.output<typeof assembleDossierQueue.payload>;
+
+/**
+ * Makes the document and the archive of a dossier that was asked for. Run again, it finds what it made before. A try
+ * that fails says so on the dossier, because somebody sits before the screen and waits for it.
+ */
+export async function assembleDossier(tools: JobTools, payload: Payload): Promise<void> {
+  try {
+    await make(tools, payload);
+  } catch (error) {
+    await tools.inShop(payload.shopId, (ctx) =>
+      ctx.tx.update(dossiers).set({ failure: failureWords(error) }).where(and(eq(dossiers.id, payload.dossierId), isNull(dossiers.finishedAt))),
+    );
+    throw error;
+  }
+}
+
+/** Only what a person can do something about; the rest is in the log and on the page of failed work. */
+function failureWords(error: unknown): string {
+  if (error instanceof ChangedOriginal) return error.message;
+  return error instanceof AppError ? error.message : 'The document or an original could not be read or kept.';
+}
+
+async function make(tools: JobTools, { shopId, dossierId }: Payload): Promise<void> {
   const asked = await tools.inShop(shopId, async (ctx) => {
     const [dossier] = await ctx.tx.select().from(dossiers).where(and(eq(dossiers.id, dossierId), isNull(dossiers.finishedAt)));
     return dossier ? { dossier, content: await readDossier(ctx, dossier.lotId) } : null;
@@ -29,7 +52,7 @@ export async function assembleDossier(tools: JobTools, { shopId, dossierId }: z.
   await tools.inShop(shopId, async (ctx) => {
     const [finished] = await ctx.tx
       .update(dossiers)
-      .set({ documentFileId: pdf.fileId, archiveFileId: zip.fileId, finishedAt: ctx.now })
+      .set({ documentFileId: pdf.fileId, archiveFileId: zip.fileId, finishedAt: ctx.now, failure: null })
       .where(and(eq(dossiers.id, dossierId), isNull(dossiers.finishedAt)))
       .returning({ id: dossiers.id });
     if (finished) await recordAudit(ctx, { action: 'dossier.make', entity: 'lot', entityId: dossier.lotId, after: { documentSha256: pdf.sha256, archiveSha256: zip.sha256 } });

@@ -3,9 +3,13 @@ import { z } from 'zod';
 import { declare } from '@/lib/api/endpoint';
 import { BINARY, Done, Id, Moment } from '@/lib/api/shapes';
 
-const Evidence = z.custom<Omit<import('./content').DossierContent, 'files'> & { files: Omit<import('./content').DossierFile, 'storageKey'>[] }>();
+import type { DossierContent, DossierFile } from './content';
 
-export const DossierMade = z.object({ id: Id, statedAt: Moment, requestedBy: z.string(), finished: z.boolean(), failure: z.string().nullable(), documentFileId: Id.nullable(), archiveFileId: Id.nullable() });
+/** Where bytes lie in storage is nobody's business outside. */
+export type DossierEvidence = Omit<DossierContent, 'files'> & { files: Omit<DossierFile, 'storageKey'>[] };
+const Evidence = z.custom<DossierEvidence>();
+
+export const DossierMade = z.object({ id: Id, statedAt: Moment, requestedBy: z.string(), finished: z.boolean(), /** Why the last try did not make it; it may still be tried again. */ failure: z.string().nullable(), documentFileId: Id.nullable(), archiveFileId: Id.nullable() });
 export type DossierMade = z.output<typeof DossierMade>;
 
 export const getDossier = declare({
@@ -21,6 +25,17 @@ export const getDossier = declare({
     made: z.array(DossierMade),
     links: z.array(z.object({ id: Id, forWhom: z.string(), expiresAt: Moment, withdrawnAt: Moment.nullable(), createdBy: z.string(), createdAt: Moment })),
   }),
+});
+
+export const listMadeDossiers = declare({
+  id: 'listMadeDossiers',
+  method: 'get',
+  path: '/lots/{lotId}/dossiers',
+  summary: 'The last dossiers that were asked for of a lot: made, being made, or failed',
+  side: 'shop',
+  permission: 'dossier.read',
+  input: z.object({ lotId: Id }),
+  response: z.object({ rows: z.array(DossierMade) }),
 });
 
 export const requestDossier = declare({
@@ -57,6 +72,20 @@ export const withdrawDossierLink = declare({
 });
 
 const Token = z.string().min(16).max(200);
+
+export const DOSSIER_LINK_STATES = ['open', 'ended', 'withdrawn', 'unknown'] as const;
+
+export const readDossierLink = declare({
+  id: 'readDossierLink',
+  method: 'get',
+  path: '/shared-dossiers/{token}/state',
+  summary: 'Whether a dossier link still opens, and whose it is',
+  side: 'public',
+  permission: 'public.use',
+  input: z.object({ token: z.string().max(400) }),
+  response: z.object({ state: z.enum(DOSSIER_LINK_STATES), shop: z.string().nullable(), phone: z.string().nullable(), zone: z.string().nullable(), endedAt: Moment.nullable() }),
+});
+export type DossierLinkFace = z.output<(typeof readDossierLink)['response']>;
 
 export const openDossierLink = declare({
   id: 'openDossierLink',

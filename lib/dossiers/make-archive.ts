@@ -13,12 +13,20 @@ interface Archive {
   open(file: DossierFile): Promise<Readable>;
 }
 
+/** Somebody has been at the storage. */
+export class ChangedOriginal extends Error {
+  constructor(name: string) {
+    super(`The original ${name} no longer has its hash: the bytes in storage are not those that were kept. No dossier was made.`);
+    this.name = 'ChangedOriginal';
+  }
+}
+
 /**
  * One ZIP: the document, every original unaltered, the data as JSON, and two lists of hashes. `SHA256SUMS` is in the
  * form that `sha256sum -c` reads, so that anybody can check it in twenty years without us; `manifest.json` says what
  * each file is. Entries carry the stated time, so that the same dossier makes the same bytes.
  *
- * @throws Error where an original no longer has the hash it was kept under: such an archive must not be made.
+ * @throws ChangedOriginal where an original no longer has the hash it was kept under: such an archive must not be made.
  */
 export async function makeArchive({ content, document, statedAt, open }: Archive): Promise<Buffer> {
   const zip = archiver('zip', { zlib: { level: 6 } });
@@ -34,7 +42,7 @@ export async function makeArchive({ content, document, statedAt, open }: Archive
   const taken = new Set<string>();
   for (const file of content.files) {
     const original = await buffer(await open(file));
-    if (sha256Of(original) !== file.sha256) throw new Error(`original ${file.id} no longer has its hash`);
+    if (sha256Of(original) !== file.sha256) throw new ChangedOriginal(file.name);
     add(uniquePath(file, taken), original, `${file.purpose.replaceAll('_', ' ')}${file.batchNumber ? ` of ${file.batchNumber}` : ''}, as received`);
   }
   const manifest = Buffer.from(`${JSON.stringify({ lot: content.lot.number, shop: content.shop.name, stated: statedAt.toISOString(), auditHead: content.auditHead, files: sums }, null, 2)}\n`);

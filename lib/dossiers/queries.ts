@@ -24,6 +24,11 @@ export async function getDossier(ctx: Ctx, { lotId }: { lotId: string }) {
   return { evidence: withoutKeys(await readDossier(ctx, lotId)), made: await readMade(ctx, lotId), links };
 }
 
+export async function listMadeDossiers(ctx: Ctx, { lotId }: { lotId: string }) {
+  authorize(ctx, 'dossier.read');
+  return { rows: await readMade(ctx, lotId) };
+}
+
 /** Asks the worker for document and archive. What they say is what stands when the worker reads it. */
 export async function requestDossier(ctx: Ctx, { lotId }: { lotId: string }) {
   authorize(ctx, 'dossier.read');

@@ -8,7 +8,7 @@ export const searchNumbers = declare({
   id: 'searchNumbers',
   method: 'get',
   path: '/search',
-  summary: 'What has this number: part, lot, batch, order, certificate, invoice, nonconformance, or the code on a traveller',
+  summary: 'What has this number: part, lot, batch, order, certificate, invoice, nonconformance, or the code on a traveller or a label',
   side: 'shop',
   permission: 'search.use',
   input: z.object({ text: z.string().trim().min(1).max(300) }),

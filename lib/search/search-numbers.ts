@@ -22,10 +22,21 @@ const EACH = 6;
  */
 export async function searchNumbers(ctx: Ctx, { text }: { text: string }): Promise<{ hits: Hit[] }> {
   authorize(ctx, 'search.use');
-  const token = /\/b\/([\w-]{16,})/.exec(text)?.[1];
-  const { rows } = await ctx.tx.execute<Hit>(token === undefined ? everywhere(text) : byTraveller(token));
+  const { rows } = await ctx.tx.execute<Hit>(byCode(text) ?? everywhere(text));
   return { hits: rows };
 }
+
+/** A scanner types the address in the code: of a traveller, or of the lot on a label. */
+function byCode(text: string): SQL | null {
+  const token = /\/b\/([\w-]{16,})/.exec(text)?.[1];
+  if (token !== undefined) return byTraveller(token);
+  const lotId = /\/lots\/([\da-f]{8}(?:-[\da-f]{4}){3}-[\da-f]{12})/i.exec(text)?.[1];
+  return lotId === undefined ? null : byLabel(lotId);
+}
+
+const byLabel = (lotId: string): SQL => sql`
+  select 'Lot' as kind, l.number, a.number || ' rev ' || a.revision || ' ' || a.name as says, '/lots/' || l.id as href
+  from lots l join parts a on a.id = l.part_id where l.id = ${lotId}`;
 
 const byTraveller = (token: string): SQL => sql`
   select 'Batch' as kind, b.number, p.name as says, '/batches/' || b.id as href

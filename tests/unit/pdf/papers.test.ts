@@ -1,7 +1,7 @@
 import { expect, test, vi } from 'vitest';
 
 import { renderPaper } from '@/lib/pdf/render-paper';
-import { qrPath } from '@/lib/pdf/qr-code';
+import { qrPath } from '@/lib/pdf/qr-path';
 import { contentHash } from '@/lib/travellers/content-hash';
 
 import { readPdf } from './read-pdf';

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { takeOutPiecesEndpoint } from '@/lib/stock/endpoints';
+
+export const POST = serve(takeOutPiecesEndpoint);
