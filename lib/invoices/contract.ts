@@ -78,7 +78,6 @@ export const InvoiceDetail = InvoiceRow.extend({
   withheldMinor: z.int(),
   approved: Approval.nullable(),
   secondApproved: Approval.nullable(),
-  needsSecond: z.boolean(),
   secondApprovalAboveMinor: z.int().nullable(),
   lines: z.array(z.object({ seq: z.int(), kind: z.enum(INVOICE_LINE_KINDS), lineId: Id.nullable(), description: z.string(), pieces: z.int().nullable(), unitPriceMinor: z.int().nullable(), amountMinor: z.int() })),
   order: z.object({

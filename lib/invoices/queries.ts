@@ -117,7 +117,6 @@ export async function getInvoice(ctx: Ctx, { invoiceId }: { invoiceId: string })
     toPayMinor: read.toPayMinor,
     withheldMinor: read.withheldMinor,
     ...(await readApprovals(ctx, read)),
-    needsSecond: isAbove(invoice.approvedMinor ?? read.toPayMinor, above),
     secondApprovalAboveMinor: above,
     lines: read.lines,
     order: { ...order, expectedMinor: expectedPrice({ ...order, lines: order.lines.map((line) => ({ pieces: line.ordered, unitPriceMinor: line.unitPriceMinor })) }).totalMinor },
