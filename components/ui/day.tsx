@@ -12,10 +12,13 @@ export function Day({ day, clock, short = false }: DayProps) {
   return <time dateTime={day}>{short ? shortDayWords(day, clock) : dayWords(day, clock)}</time>;
 }
 
-/** `Wed 15 Apr 16:40`, in mono because moments stand in columns. */
+/**
+ * `Wed 15 Apr 16:40`, in mono because moments stand in columns. A server and a browser may carry the rules of a zone
+ * from different years and be an hour apart; what the server drew then stands, and nothing is drawn anew.
+ */
 export function Moment({ at, clock }: { at: Date; clock: Clock }) {
   return (
-    <time dateTime={at.toISOString()} className="num whitespace-nowrap">
+    <time dateTime={at.toISOString()} className="num whitespace-nowrap" suppressHydrationWarning>
       {momentWords(at, clock)}
     </time>
   );
