@@ -3,16 +3,17 @@ import type { Metadata } from 'next';
 import { ask, Prefetched } from '@/app/_kit/prefetch';
 import { AuditScreen, type AuditFilter } from '@/components/audit/audit-screen';
 import { listAudit } from '@/lib/audit/contract';
-import { listAuditFiltersEndpoint } from '@/lib/audit/endpoints';
+import { listAuditEndpoint, listAuditFiltersEndpoint } from '@/lib/audit/endpoints';
 
 export const metadata: Metadata = { title: 'Audit trail' };
 
 const FILTERS = ['entity', 'entityId', 'personId', 'from', 'to'] as const;
 
 export default async function AuditPage({ searchParams }: { searchParams: Promise<Record<string, string | string[] | undefined>> }) {
+  const filter = readFilter(await searchParams);
   return (
-    <Prefetched queries={[ask(listAuditFiltersEndpoint, {})]}>
-      <AuditScreen filter={readFilter(await searchParams)} />
+    <Prefetched queries={[ask(listAuditFiltersEndpoint, {}), ask(listAuditEndpoint, { ...filter, limit: 50 })]}>
+      <AuditScreen filter={filter} />
     </Prefetched>
   );
 }
