@@ -1,0 +1,23 @@
+import type { Metadata } from 'next';
+
+import { ask, Prefetched, readOnServer } from '@/app/_kit/prefetch';
+import { readId } from '@/app/(shop)/lots/search';
+import { EditPart } from '@/components/parts/edit-part';
+import { getPartEndpoint } from '@/lib/parts/endpoints';
+import { getMeEndpoint } from '@/lib/session/endpoints';
+
+type Props = { params: Promise<{ id: string }> };
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { number, revision } = await readOnServer(getPartEndpoint, { partId: readId((await params).id) });
+  return { title: `Correct ${number} rev ${revision}` };
+}
+
+export default async function EditPartPage({ params }: Props) {
+  const partId = readId((await params).id);
+  return (
+    <Prefetched queries={[ask(getMeEndpoint, {}), ask(getPartEndpoint, { partId })]}>
+      <EditPart partId={partId} />
+    </Prefetched>
+  );
+}
