@@ -30,5 +30,5 @@ export interface Job<Payload extends z.ZodType = z.ZodType> {
 export function job<Payload extends z.ZodType>(
   given: Pick<Job<Payload>, 'name' | 'payload' | 'run'> & Partial<Job<Payload>>,
 ): Job<Payload> {
-  return { retries: 12, retryDelayS: 5, concurrency: 2, ...given };
+  return { retries: 12, retryDelayS: 5, concurrency: 1, ...given };
 }

@@ -36,7 +36,7 @@ async function main(): Promise<void> {
 
 async function listen(boss: PgBoss, db: Db, job: Job): Promise<void> {
   for (let lane = 0; lane < job.concurrency; lane++) {
-    await boss.work<unknown>(job.name, { pollingIntervalSeconds: 0.5, batchSize: 1, includeMetadata: true }, async (taken) => {
+    await boss.work<unknown>(job.name, { pollingIntervalSeconds: 1, batchSize: 1, includeMetadata: true }, async (taken) => {
       for (const one of taken) await runJob(db, job, one.data, one.retryCount + 1, one.id);
     });
   }
