@@ -22,6 +22,9 @@ export const BatchRow = z.object({
   promisedOn: z.string().nullable(),
   wantedBackOn: z.string().nullable(),
   lastBackAt: Moment.nullable(),
+  putAsideAt: Moment.nullable(),
+  /** Days past the promise that counts in this shop, while anything is away. */
+  daysLate: z.int(),
 });
 export type BatchRow = z.output<typeof BatchRow>;
 
@@ -29,10 +32,10 @@ export type BatchRow = z.output<typeof BatchRow>;
 export const BatchRef = z.object({ id: Id, number: z.string(), version: z.int() });
 
 /** The version of the batch that the person saw; an older one is refused, so that nobody's change is lost. */
-const Seen = z.object({ batchId: Id, version: z.int().min(1) });
+export const Seen = z.object({ batchId: Id, version: z.int().min(1) });
 
-const Price = z.int('Enter an amount.').min(0, 'Enter 0 or more.').max(100_000_000, 'Enter 1,000,000.00 or less.');
-const Note = z.string().trim().max(2000, 'Keep it under 2000 letters.');
+export const Price = z.int('Enter an amount.').min(0, 'Enter 0 or more.').max(100_000_000, 'Enter 1,000,000.00 or less.');
+export const Note = z.string().trim().max(2000, 'Keep it under 2000 letters.');
 
 export const NewLine = z.object({
   lotId: Id,
@@ -63,6 +66,98 @@ export const listBatches = declare({
   permission: 'batch.read',
   input: PageQuery.extend({ stage: z.enum(STAGES).optional(), processorId: Id.optional() }),
   response: pageOf(BatchRow),
+});
+
+export const Batch = z.object({
+  id: Id,
+  number: z.string(),
+  orderNumber: z.string(),
+  version: z.int(),
+  stage: z.enum(STAGES),
+  processorId: Id,
+  processor: z.string(),
+  contactEmail: z.string(),
+  process: z.enum(PROCESSES),
+  /** With revision and class. */
+  specification: z.string(),
+  note: z.string().nullable(),
+  leavesOn: z.string().nullable(),
+  wantedBackOn: z.string().nullable(),
+  currency: z.string(),
+  lotMinimumMinor: z.int(),
+  certificationFeeMinor: z.int(),
+  pieces: z.int(),
+  piecesBack: z.int(),
+  putAsideAt: Moment.nullable(),
+  dispatchedAt: Moment.nullable(),
+  dispatchedBy: z.string().nullable(),
+  acknowledgedAt: Moment.nullable(),
+  acknowledgedPieces: z.int().nullable(),
+  markedDoneAt: Moment.nullable(),
+  shippedAt: Moment.nullable(),
+  shippedNote: z.string().nullable(),
+  promisedOn: z.string().nullable(),
+  firstPromisedOn: z.string().nullable(),
+  lastBackAt: Moment.nullable(),
+  cancelledAt: Moment.nullable(),
+  cancelReason: z.string().nullable(),
+  paymentWaivedAt: Moment.nullable(),
+  paymentWaivedReason: z.string().nullable(),
+  /** Days past the promise that counts in this shop, while anything is away. */
+  daysLate: z.int(),
+  zone: z.string(),
+});
+export type Batch = z.output<typeof Batch>;
+
+export const getBatch = declare({
+  id: 'getBatch',
+  method: 'get',
+  path: '/batches/{batchId}',
+  summary: 'One batch: where to, which step, days, terms and where it stands',
+  side: 'shop',
+  permission: 'batch.read',
+  input: z.object({ batchId: Id }),
+  response: Batch,
+});
+
+export const BatchLine = z.object({
+  id: Id,
+  lineNo: z.int(),
+  lotId: Id,
+  partId: Id,
+  lotNumber: z.string(),
+  partNumber: z.string(),
+  partRevision: z.string(),
+  partName: z.string(),
+  material: z.string(),
+  thickness: z.string().nullable(),
+  heat: z.string(),
+  conditionBefore: z.string().nullable(),
+  targetCondition: z.string().nullable(),
+  serials: z.array(z.string()),
+  pieces: z.int(),
+  /** Pieces of the lot that wait for the same step and could still join. */
+  waiting: z.int(),
+  unitPriceMinor: z.int(),
+  loadNo: z.int().nullable(),
+  /** Of one piece, in g and mm²; null where the part does not say. */
+  massG: z.number().nullable(),
+  areaMm2: z.number().nullable(),
+});
+export type BatchLine = z.output<typeof BatchLine>;
+
+export const Requirement = ToProve.extend({ id: Id, lineId: Id.nullable() });
+export type Requirement = z.output<typeof Requirement>;
+
+export const getBatchLines = declare({
+  id: 'getBatchLines',
+  method: 'get',
+  path: '/batches/{batchId}/lines',
+  summary: 'Lines of a batch and what must be proved; as frozen once it has left',
+  side: 'shop',
+  permission: 'batch.read',
+  input: z.object({ batchId: Id }),
+  response: z.object({ lines: z.array(BatchLine), requirements: z.array(Requirement) }),
 });
 
 export const createBatch = declare({

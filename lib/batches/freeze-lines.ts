@@ -33,7 +33,7 @@ export async function readLinesAsTheyAre(ctx: Ctx, batchId: string) {
       stepNote: step.note,
       serials: lot.serialised ? await serialsPackedIn(ctx, line.id) : [],
     };
-    withSerials.push({ line, now });
+    withSerials.push({ line, now, part });
   }
   return withSerials;
 }

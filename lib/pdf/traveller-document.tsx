@@ -11,10 +11,10 @@ import { QrCode } from './qr-code';
 const STRAW = '#D9B44A';
 const CODE_SIZE = 72;
 
-/** The page that goes with the parts and comes back with them. `url` is what its code opens; a draft has none. */
+/** The page that goes with the parts and comes back with them. `url` is what its code opens, where a link stands. */
 export function TravellerDocument({ content, url, hash }: { content: TravellerContent; url: string | null; hash: string }) {
   const { number, documentVersion, zone, lines, shop } = content;
-  const version = url === null ? 'draft' : `version ${documentVersion}`;
+  const version = documentVersion === 0 ? 'draft' : `version ${documentVersion}`;
   return (
     <Document title={`Traveller ${number}, ${version}`} author={shop.name} creationDate={new Date(content.statedAt)} creator="Lotwright" producer="Lotwright">
       <Paper sheet={content.paper} hash={hash} stated={`${number} ${version}, ${paperMoment(content.statedAt, zone)} by ${content.statedBy}. Reply to the mail with files attached, or scan the code.`}>
@@ -58,8 +58,8 @@ function Head({ content, url, version }: { content: TravellerContent; url: strin
         <Text style={{ fontFamily: COND, fontWeight: 600, fontSize: 11 }}>{[counted(pieces, 'piece'), counted(lines.length, 'line'), ...(loads > 0 ? [counted(loads, 'load')] : [])].join(', ')}</Text>
       </TagHead>
       <View style={{ width: CODE_SIZE, alignItems: 'center' }}>
-        {url === null ? <Text style={{ ...type.caption, marginTop: 30 }}>no code on a draft</Text> : <QrCode text={url} size={CODE_SIZE} />}
-        <Text style={{ fontFamily: MONO, fontSize: 7, marginTop: 3 }}>{url === null ? `${number} draft` : `${number} v${content.documentVersion}`}</Text>
+        {url === null ? <Text style={{ ...type.caption, marginTop: 30 }}>no code: no link stands</Text> : <QrCode text={url} size={CODE_SIZE} />}
+        <Text style={{ fontFamily: MONO, fontSize: 7, marginTop: 3 }}>{`${number} ${content.documentVersion === 0 ? 'draft' : `v${content.documentVersion}`}`}</Text>
       </View>
     </View>
   );

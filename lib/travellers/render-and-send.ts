@@ -44,7 +44,7 @@ export async function renderAndSend(tools: JobTools, { shopId, batchId, document
       const rows = await ctx.tx.update(batchDocuments).set({ fileId, sha256 }).where(and(eq(batchDocuments.id, id), isNull(batchDocuments.fileId))).returning({ id: batchDocuments.id });
       recorded += rows.length;
     }
-    if (recorded > 0) await sendMail(ctx, batchId, made, mail);
+    if (recorded > 0 && mail !== 'none') await sendMail(ctx, batchId, made, mail);
   });
 }
 

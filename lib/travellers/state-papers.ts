@@ -6,6 +6,7 @@ import { shopOf, type Ctx } from '@/lib/auth/context';
 import { batchLinkToken } from '@/lib/batches/batch-link-token';
 import { newId } from '@/lib/ids';
 import { enqueue } from '@/lib/jobs/queue';
+import { makeBatchLink } from '@/lib/portal/make-batch-link';
 
 import { readPaperContents } from './paper-content';
 import { renderDocumentsQueue } from './render-documents-queue';
@@ -15,7 +16,7 @@ import { renderDocumentsQueue } from './render-documents-queue';
  * all in the caller's transaction, so that papers, frozen lines and mail exist together or not at all.
  */
 export async function statePapers(ctx: Ctx, batchId: string, { mail, changes }: { mail: 'dispatch' | 'reissue'; changes: readonly string[] }): Promise<number> {
-  const linkId = await linkFor(ctx, batchId);
+  const linkId = await linkFor(ctx, batchId, mail);
   const documentVersion = (await lastVersion(ctx, batchId)) + 1;
   const version = { documentVersion, changes };
   const { traveller, order } = await readPaperContents(ctx, batchId, linkId, { traveller: version, order: version });
@@ -40,8 +41,11 @@ async function lastVersion(ctx: Ctx, batchId: string): Promise<number> {
   return last?.version ?? 0;
 }
 
-/** The link the papers carry: the one that stands, if its key can still be made; otherwise a new one beside it. */
-async function linkFor(ctx: Ctx, batchId: string): Promise<string> {
+/**
+ * The link the papers carry: the one that stands, if its key can still be made; otherwise a new one beside it. Where
+ * the shop has withdrawn them all, a new version of the papers does not give back what was taken away.
+ */
+async function linkFor(ctx: Ctx, batchId: string, mail: 'dispatch' | 'reissue'): Promise<string | null> {
   const standing = await ctx.tx
     .select({ id: batchLinks.id, tokenHash: batchLinks.tokenHash })
     .from(batchLinks)
@@ -49,9 +53,8 @@ async function linkFor(ctx: Ctx, batchId: string): Promise<string> {
     .orderBy(desc(batchLinks.id));
   const known = standing.find((link) => link.tokenHash === hashToken(batchLinkToken(link.id)));
   if (known) return known.id;
+  if (mail === 'reissue' && standing.length === 0) return null;
   const [batch] = await ctx.tx.select({ processorId: batches.processorId }).from(batches).where(eq(batches.id, batchId));
   if (!batch) throw new Error('no batch to link to');
-  const id = newId();
-  await ctx.tx.insert(batchLinks).values({ id, shopId: shopOf(ctx), batchId, processorId: batch.processorId, tokenHash: hashToken(batchLinkToken(id)), createdAt: ctx.now });
-  return id;
+  return (await makeBatchLink(ctx, { batchId, processorId: batch.processorId })).linkId;
 }

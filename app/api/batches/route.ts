@@ -1,4 +1,5 @@
 import { serve } from '@/app/_kit/serve';
-import { listBatchesEndpoint } from '@/lib/batches/endpoints';
+import { listBatchesEndpoint, createBatchEndpoint } from '@/lib/batches/endpoints';
 
 export const GET = serve(listBatchesEndpoint);
+export const POST = serve(createBatchEndpoint);

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { cancelBatchEndpoint } from '@/lib/batches/endpoints';
+
+export const POST = serve(cancelBatchEndpoint);

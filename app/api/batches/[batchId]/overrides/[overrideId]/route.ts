@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { withdrawOverrideEndpoint } from '@/lib/batches/endpoints';
+
+export const DELETE = serve(withdrawOverrideEndpoint);

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { getTravellerEndpoint } from '@/lib/batches/endpoints';
+
+export const GET = serve(getTravellerEndpoint);
