@@ -43,11 +43,11 @@ function rowOf(line: InvoiceLine, { order, differences }: Pick<InvoiceDetail, 'o
   const ordered = line.kind === 'pieces' ? order.lines.find((one) => one.lineId === line.lineId) : undefined;
   const invoiced = { pieces: line.pieces, eachMinor: line.unitPriceMinor, minor: line.amountMinor };
   const row = { ...bare(`line ${line.seq}`, ordered ? partWords(ordered) : line.description), seq: line.seq, invoiced, differences: own };
-  if (ordered) return { ...row, note: line.description === partWords(ordered) ? null : line.description, ordered: orderedOf(ordered), accepted: acceptedOf(ordered) };
+  if (ordered) return { ...row, note: partWords(ordered).includes(line.description) ? null : line.description, ordered: orderedOf(ordered), accepted: acceptedOf(ordered) };
   const over = own.filter((one) => one.clearance?.choice !== 'accept').reduce((sum, one) => sum + one.overMinor, 0);
   const may = line.amountMinor - over;
   const charge = orderedCharge(line.kind, order);
-  return { ...row, note: line.kind === 'pieces' || line.description === LINE_KIND_WORDS[line.kind] ? null : LINE_KIND_WORDS[line.kind], ordered: charge > 0 ? { pieces: null, eachMinor: null, minor: charge } : null, accepted: may > 0 ? { pieces: null, minor: may } : null };
+  return { ...row, ordered: charge > 0 ? { pieces: null, eachMinor: null, minor: charge } : null, accepted: may > 0 ? { pieces: null, minor: may } : null };
 }
 
 const partWords = (line: OrderLine): string => `${line.partNumber} ${line.partRevision}, ${line.partName}`;

@@ -3,15 +3,16 @@ import { VerdictWord } from '@/components/ui/verdict';
 import type { InvoiceDetail } from '@/lib/invoices/contract';
 import { amountText } from '@/lib/money';
 
-import { acceptedMinor, compareRows, payableNow, type CompareRow } from './compare-rows';
+import { compareRows, payableNow, type CompareRow } from './compare-rows';
 import { Difference } from './difference-cell';
 
-const EDGE = 'border-l border-rule pl-3';
+const EDGE = 'border-l border-l-rule pl-3';
 const GROUP = 'border-b-0 pb-0 font-cond text-sub text-ink';
 
 /** Ordered, accepted and invoiced, line by line, with each difference and its way out. */
 export function CompareTable({ invoice }: { invoice: InvoiceDetail }) {
   const { currency, differences, totalMinor, order } = invoice;
+  const rows = compareRows(invoice);
   const payable = payableNow(invoice);
   const over = (totalMinor ?? 0) - payable;
   const cleared = differences.filter((one) => one.clearance !== null).length;
@@ -20,11 +21,11 @@ export function CompareTable({ invoice }: { invoice: InvoiceDetail }) {
       <table role="table" aria-label="Invoice against order and accepted pieces" className="lw-table">
         <Head currency={currency} />
         <tbody role="rowgroup">
-          {compareRows(invoice).map((row) => (
+          {rows.map((row) => (
             <CompareLine key={row.key} row={row} invoice={invoice} />
           ))}
           <Row state="sum">
-            <Cell />
+            <Cell figure />
             <Cell className="font-cond">Sum</Cell>
             <Cell className={EDGE} />
             <Cell />
@@ -32,8 +33,8 @@ export function CompareTable({ invoice }: { invoice: InvoiceDetail }) {
               {amountText(order.expectedMinor)}
             </Cell>
             <Cell className={EDGE} />
-            <Cell figure head="Accepted pieces">
-              {amountText(acceptedMinor(order))}
+            <Cell figure head="Accepted">
+              {amountText(rows.reduce((sum, row) => sum + (row.accepted?.minor ?? 0), 0))}
             </Cell>
             <Cell className={EDGE} />
             <Cell />
