@@ -20,7 +20,7 @@ export function AssemblyWaits({ tideline }: { tideline: Tideline }) {
           No assembly is open. Enter one with the parts it needs, and this list says what it waits for. <Link href="/assemblies">Assemblies</Link>
         </p>
       ) : (
-        <Table label="What each assembly waits for" columns={['Assembly', 'Needed', 'Ready', 'Pieces', 'Batches'].map((says) => ({ says, hidden: true }))}>
+        <Table keep label="What each assembly waits for" columns={['Assembly', 'Needed', 'Ready', 'Pieces', 'Batches'].map((says) => ({ says, hidden: true }))}>
           {assemblies.map((assembly) => (
             <AssemblyRow key={assembly.id} assembly={assembly} tideline={tideline} />
           ))}

@@ -22,7 +22,7 @@ export function PhoneTideline({ tideline }: { tideline: Tideline }) {
       )}
       <p className="border-t-2 border-ink">
         <span className="inline-block bg-ink px-4 font-cond text-sub font-semibold text-paper">
-          {dayWords(tideline.today, clock)} <span className="num">{timeWords(clock.now, tideline.zone)}</span>
+          {dayWords(tideline.today, clock)} <span className="num" suppressHydrationWarning>{timeWords(clock.now, tideline.zone)}</span>
         </span>
       </p>
       {below.map((group) => (

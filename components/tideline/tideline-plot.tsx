@@ -41,8 +41,8 @@ export function TidelinePlot({ tideline }: { tideline: Tideline }) {
       </div>
       <div className="relative" style={{ marginLeft: LABEL_PX, height: 48 }}>
         <DayTicks scale={scale} />
-        <p className="absolute top-0 z-10 bg-ink px-2 font-cond text-tag leading-[21px] font-semibold whitespace-nowrap text-paper" style={{ left: scale.todayX - 1 }}>
-          {dayWords(tideline.today, { zone: tideline.zone, now })} <span className="num">{timeWords(now, tideline.zone)}</span>
+        <p className="absolute top-0 z-10 bg-ink px-2 font-cond text-tag leading-[21px] font-semibold whitespace-nowrap text-paper" style={{ left: scale.todayX - 1 }} suppressHydrationWarning>
+          {dayWords(tideline.today, { zone: tideline.zone, now })} <span className="num" suppressHydrationWarning>{timeWords(now, tideline.zone)}</span>
         </p>
       </div>
       <div className="relative border-y-heavy border-ink" style={{ height: height + 3 }}>
@@ -59,7 +59,10 @@ export function TidelinePlot({ tideline }: { tideline: Tideline }) {
   );
 }
 
-/** The line moves every quarter of an hour. It starts at the server's time, so that both draw the same first picture. */
+/**
+ * The line moves every quarter of an hour. It starts at the server's time, so that both draw the same first
+ * picture; where browser and server know different rules of a zone, the clock on it is the browser's.
+ */
 function useQuarterHour(serverNow: string): Date {
   const [now, setNow] = useState(() => new Date(serverNow));
   useEffect(() => {

@@ -1,4 +1,5 @@
 import type { Role } from '@/lib/auth/roles';
+import { dayWords } from '@/lib/day-words';
 
 import type { Tideline, TidelineBatch } from './contract';
 import { daysBetween, daysLate } from './lateness';
@@ -47,10 +48,11 @@ function pick(batch: TidelineBatch, processor: string, tideline: Tideline, has: 
 
 function pickToDo(batch: TidelineBatch, processor: string, tideline: Tideline, has: (...roles: Role[]) => boolean): Found | null {
   const page = `/batches/${batch.id}`;
+  const clock = { zone: 'UTC', now: new Date(`${tideline.today}T12:00:00Z`) };
   const toDo = (what: string, why: string, verb: string, href: string): Found => ({ rank: RANK.toDo, what, why, verb, href });
   const { stage, invoice } = batch;
-  if (stage === 'building' && has('lead') && batch.leavesOn !== null && batch.leavesOn <= tideline.today) return toDo('Dispatch', batch.leavesOn === tideline.today ? 'leaves today' : `should have left ${batch.leavesOn}`, 'Open', page);
-  if (stage === 'dispatched' && !batch.acknowledged && batch.dispatchedOn !== null && batch.dispatchedOn < tideline.today && has('lead')) return toDo(`Ring ${processor}: not acknowledged`, `left ${batch.dispatchedOn}`, 'Open', page);
+  if (stage === 'building' && has('lead') && batch.leavesOn !== null && batch.leavesOn <= tideline.today) return toDo('Dispatch', batch.leavesOn === tideline.today ? 'leaves today' : `should have left ${dayWords(batch.leavesOn, clock)}`, 'Open', page);
+  if (stage === 'dispatched' && !batch.acknowledged && batch.dispatchedOn !== null && batch.dispatchedOn < tideline.today && has('lead')) return toDo(`Ring ${processor}: not acknowledged`, `left ${dayWords(batch.dispatchedOn, clock)}`, 'Open', page);
   if (batch.certificatesToProve > 0 && batch.piecesBack > 0 && has('inspector')) return toDo(`Prove ${batch.certificatesToProve === 1 ? 'a certificate' : `${batch.certificatesToProve} certificates`}`, batch.contents, 'Prove', `/certificates/${batch.firstCertificateId ?? ''}`);
   if (stage === 'returned' && batch.certificatesToProve === 0 && has('lead', 'inspector')) return toDo(`Ask ${processor} for the papers`, 'pieces are back without a certificate to prove', 'Write', `${page}#messages`);
   if (invoice && !invoice.entered && has('office')) return toDo('Enter an invoice', `from ${processor}`, 'Open', `/invoices/${invoice.id}`);

@@ -21,7 +21,7 @@ export async function runJobs(base: { db: Db; owner: Db }, job: Job): Promise<Ra
   for (;;) {
     const [taken] = await boss.fetch<Record<string, unknown>>(job.name, { batchSize: 1, includeMetadata: true });
     if (!taken) return ran;
-    const error = await runJob(base.db, job, taken.data, taken.retryCount + 1, taken.id).then(
+    const error = await runJob(base.db, job, { data: taken.data, attempt: taken.retryCount + 1, id: taken.id }).then(
       () => null,
       (reason: unknown) => (reason instanceof Error ? reason : new Error(String(reason))),
     );

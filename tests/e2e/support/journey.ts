@@ -1,0 +1,93 @@
+import { test as base, expect, type Locator, type Page } from '@playwright/test';
+
+import { DEMO_PASSWORD } from '@/db/seed/sign-ins';
+
+/** What a way through the product cost the person: printed at its end, because fewer is better than prettier. */
+export interface Cost {
+  clicks: number;
+  keys: number;
+  pages: number;
+  waitedS: number;
+}
+
+/** A person at a browser. Counts presses, typed keys, pages and the seconds of waiting for what was asked. */
+export class Person {
+  readonly cost: Cost = { clicks: 0, keys: 0, pages: 0, waitedS: 0 };
+
+  constructor(
+    readonly name: string,
+    readonly page: Page,
+  ) {
+    page.on('framenavigated', (frame) => {
+      if (frame === page.mainFrame()) this.cost.pages += 1;
+    });
+  }
+
+  async goTo(path: string): Promise<void> {
+    await this.waiting(() => this.page.goto(path));
+  }
+
+  async press(target: Locator): Promise<void> {
+    this.cost.clicks += 1;
+    await this.waiting(() => target.click());
+  }
+
+  /** Types into a field, replacing what is there. */
+  async type(target: Locator, text: string): Promise<void> {
+    this.cost.clicks += 1;
+    this.cost.keys += text.length;
+    await this.waiting(() => target.fill(text));
+  }
+
+  async key(key: string): Promise<void> {
+    this.cost.keys += 1;
+    await this.waiting(() => this.page.keyboard.press(key));
+  }
+
+  /** Waits until something is to be seen; the time counts as the person's. */
+  async sees(target: Locator): Promise<void> {
+    await this.waiting(() => expect(target).toBeVisible({ timeout: 30_000 }));
+  }
+
+  async signIn(email: string): Promise<void> {
+    await this.goTo('/sign-in');
+    await this.type(this.page.getByLabel('E-mail'), email);
+    await this.type(this.page.getByLabel('Password'), DEMO_PASSWORD);
+    await this.press(this.page.getByRole('button', { name: 'Sign in', exact: true }));
+    await this.waiting(() => this.page.waitForURL((url) => !url.pathname.startsWith('/sign-in'), { timeout: 60_000 }));
+  }
+
+  /** One line for the log: what the way cost. */
+  report(way: string): void {
+    const { clicks, keys, pages, waitedS } = this.cost;
+    console.log(`${this.name}, ${way}: ${clicks} clicks, ${keys} keys, ${pages} pages, ${waitedS.toFixed(1)} s of waiting`);
+  }
+
+  private async waiting<T>(work: () => Promise<T>): Promise<T> {
+    const began = performance.now();
+    try {
+      return await work();
+    } finally {
+      this.cost.waitedS += (performance.now() - began) / 1000;
+    }
+  }
+}
+
+interface People {
+  /** A person with a browser of their own: no cookie is shared. */
+  person(name: string, width?: number): Promise<Person>;
+}
+
+export const test = base.extend<People>({
+  person: async ({ browser, baseURL }, use) => {
+    const contexts: Awaited<ReturnType<typeof browser.newContext>>[] = [];
+    await use(async (name, width = 1440) => {
+      const context = await browser.newContext({ ...(baseURL === undefined ? {} : { baseURL }), viewport: { width, height: width < 500 ? 844 : 900 }, hasTouch: width < 900 });
+      contexts.push(context);
+      return new Person(name, await context.newPage());
+    });
+    for (const context of contexts) await context.close();
+  },
+});
+
+export { expect };
