@@ -118,6 +118,9 @@ export const PortalRow = z.object({
 });
 export type PortalRow = z.output<typeof PortalRow>;
 
+/** Rows that the page brings along; more are asked for. */
+export const FIRST_ROWS = 200;
+
 export const listPortalBatches = declare({
   id: 'listPortalBatches',
   method: 'get',

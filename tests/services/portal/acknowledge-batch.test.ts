@@ -1,5 +1,6 @@
 import { and, eq } from 'drizzle-orm';
 import { describe, expect, test } from 'vitest';
+import type { z } from 'zod';
 
 import { batches, batchLines, messages, promises } from '@/db/schema/batches';
 import { pieces } from '@/db/schema/lots';
@@ -17,7 +18,7 @@ import { makeSent, queuedMails, refusalOf } from './portal-kit';
 
 const base = openDatabase();
 
-type Given = Partial<Parameters<typeof declaration.input.parse>[0] & object> & { batchId: string };
+type Given = z.input<typeof declaration.input>;
 const acknowledge = (ctx: Ctx, given: Given) => acknowledgeBatch(ctx, declaration.input.parse(given));
 const linesOf = (world: World, batchId: string) => world.as(['lead'], ({ tx }) => tx.select({ id: batchLines.id, lotId: batchLines.lotId, pieces: batchLines.pieces }).from(batchLines).where(eq(batchLines.batchId, batchId)).orderBy(batchLines.lineNo));
 
