@@ -63,7 +63,7 @@ function NumberAndDate({ proving }: { proving: Proving }) {
     <form noValidate onSubmit={keep} onBlur={keepWhenWhole} className="flex flex-wrap items-start gap-3">
       <TextField className="w-56 max-md:w-full" label="Certificate number" mono error={errors.number?.message} {...form.register('number')} />
       <DateField className="w-44 max-md:w-full" label="Date on it" error={errors.datedOn?.message} {...form.register('datedOn')} />
-      <span className="pt-[27px] text-second text-quiet" role="status">
+      <span className="pt-[27px] max-md:pt-0 text-second text-quiet" role="status">
         {errors.root?.message ?? savedWords({ isDirty, isPending: write.isPending, isThere: certificate.number !== null })}
       </span>
     </form>

@@ -3,7 +3,7 @@ import Link from 'next/link';
 
 import { usePages } from '@/components/api/use-api';
 import { useClock } from '@/components/session/use-me';
-import { Button } from '@/components/ui/button';
+import { Button, ButtonLink } from '@/components/ui/button';
 import { Day, Moment } from '@/components/ui/day';
 import { Empty } from '@/components/ui/empty';
 import { Failing } from '@/components/ui/failing';
@@ -25,7 +25,7 @@ export function CertificatesScreen() {
   const done = rows.filter((row) => row.state !== 'waiting');
   return (
     <>
-      <PageHead title="Certificates" sub={isPending ? undefined : waitingWords(waiting.length)} />
+      <PageHead title="Certificates" sub={isPending ? undefined : waitingWords(waiting.length)} actions={<><ButtonLink href="/receive">Count in</ButtonLink><ButtonLink href="/nonconformances">Nonconformances</ButtonLink></>} />
       {isPending && <Loading label="Loading certificates" rows={8} />}
       {error && <Failing says="The certificates could not be read." again={error.message} />}
       {data && rows.length === 0 && <Empty says="No certificate has come yet." comes="A processor sends them from the link in the dispatch mail; one that came on paper is added at its batch." action={<Link href="/batches">To the batches</Link>} />}

@@ -39,16 +39,18 @@ function LineRow({ line, proving }: { line: ProvedLine; proving: Proving }) {
         <Cell>
           <RowButton rowId={line.id} selected={selected} says={`${line.lineNo} ${lineName(line)}`} onSelect={() => proving.select(line.id)} onConfirm={canEdit ? confirm : undefined} />
         </Cell>
-        <Cell code head="Ordered">
+        <Cell code head="Ordered" className="text-[0.78rem]">
           {line.pieces}
         </Cell>
-        <Cell code strong head="This one covers">
+        <Cell code strong head="This one covers" className="text-[0.78rem]">
           {entered ?? (line.here > 0 ? line.here : '')}
         </Cell>
         <Cell>
           <VerdictWord verdict={verdict} says={verdictWords(line, entered)} />
         </Cell>
-        <Cell right>{entered === null && line.coverable > 0 ? <strong className="font-cond">to decide</strong> : <span className="text-quiet">{line.here > 0 && entered === null ? 'signed' : ''}</span>}</Cell>
+        <Cell right>
+          <span className="text-quiet">{yourWords(line, entered)}</span>
+        </Cell>
       </Row>
       {selected && <LineOpen line={line} proving={proving} canEdit={canEdit} />}
     </>
@@ -64,6 +66,11 @@ function verdictOf(line: ProvedLine, entered: number | null): Verdict {
 
 function verdictWords(line: ProvedLine, entered: number | null): string {
   return `${line.covered + (entered ?? 0)} of ${line.pieces} covered`;
+}
+
+function yourWords(line: ProvedLine, entered: number | null): string {
+  if (entered !== null) return 'entered';
+  return line.here > 0 ? 'signed' : '';
 }
 
 function LineOpen({ line, proving, canEdit }: { line: ProvedLine; proving: Proving; canEdit: boolean }) {

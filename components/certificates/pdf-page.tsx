@@ -7,7 +7,7 @@ import { Failing } from '@/components/ui/failing';
 pdfjs.GlobalWorkerOptions.workerSrc = '/pdfjs/pdf.worker.min.mjs';
 
 /** Nothing of a received file is run: no evaluation, no forms, no links, only its marks on a canvas. */
-const OPTIONS = { isEvalSupported: false, useWasm: false, wasmUrl: '/pdfjs/', standardFontDataUrl: '/pdfjs/standard_fonts/', disableAutoFetch: true, disableStream: true, enableXfa: false };
+const OPTIONS = { isEvalSupported: false, useWasm: false, wasmUrl: '/pdfjs/', standardFontDataUrl: '/pdfjs/standard_fonts/', disableAutoFetch: true, disableStream: true, enableXfa: false, useSystemFonts: false };
 
 interface PdfPageProps {
   url: string;

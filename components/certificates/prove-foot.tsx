@@ -12,7 +12,7 @@ export function ProveFoot({ proving, onSign }: { proving: Proving; onSign: () =>
   return (
     <div className="sticky bottom-0 z-10 border-t-heavy border-ink bg-paper px-6 py-3 max-md:static max-md:px-4">
       <div className="flex flex-wrap items-start justify-between gap-x-6 gap-y-2">
-        <div className="min-w-0">
+        <div className="min-w-0 flex-1">
           <strong className="font-cond text-section">
             <span className="num">{decided}</span> of <span className="num">{rows.length}</span> decided.{' '}
             {left > 0 && proving.canEdit && (
@@ -56,9 +56,11 @@ function SignButton({ proving, onSign, pieces }: { proving: Proving; onSign: () 
   const notNow = whyNotNow(proving);
   if (!proving.mayProve) return <p className="text-second text-quiet">Inspectors prove and sign. You see what they see.</p>;
   return (
-    <Button look="primary" size="big" notNow={notNow ?? undefined} reasonAt="below" onClick={onSign} className="min-w-44">
-      {pieces > 0 ? `Sign for ${pieces} pieces` : 'Sign'}
-    </Button>
+    <div className="w-[16.75rem] flex-none text-right max-md:w-full">
+      <Button look="primary" size="big" notNow={notNow ?? undefined} reasonAt="below" onClick={onSign} className="min-w-44 max-md:w-full">
+        {pieces > 0 ? `Sign for ${pieces} pieces` : 'Sign'}
+      </Button>
+    </div>
   );
 }
 
@@ -66,7 +68,7 @@ function whyNotNow({ data, readiness }: Proving): string | null {
   if (data.certificate.setAsideAt !== null) return 'It is set aside.';
   if (!data.file.verified) return 'The file did not arrive whole.';
   if (data.dispatchedByYou === 'refuse') return `You dispatched ${data.batch.number}. Here another person accepts its certificates.`;
-  if (data.lines.every((line) => line.coverable === 0)) return data.signatures.length > 0 ? 'All that came back is covered.' : 'Nothing that came back is without proof. Count in first.';
+  if (data.lines.every((line) => line.coverable === 0)) return data.lines.some((line) => line.covered > 0) ? 'All that came back is covered.' : 'Nothing is in quarantine yet. Count in first.';
   if (data.certificate.number === null || data.certificate.datedOn === null) return 'Enter its number and date first.';
   return readiness.why;
 }

@@ -14,14 +14,21 @@ import { SignStep } from './sign-step';
 import { Signatures } from './signatures';
 import type { Proving } from './use-proving';
 
-const COLUMNS = [{ says: 'Number of the row', hidden: true }, { says: 'Must be proved' }, { says: 'Ordered' }, { says: 'As stated' }, { says: 'Verdict' }, { says: 'You', right: true }];
+const COLUMNS = [
+  { says: 'Number of the row', hidden: true, className: 'w-7' },
+  { says: 'Must be proved', className: 'w-[25%]' },
+  { says: 'Ordered', className: 'w-[23%]' },
+  { says: 'As stated', className: 'w-[17%]' },
+  { says: 'Verdict' },
+  { says: 'You', right: true },
+];
 
 export function ProvePanel({ proving }: { proving: Proving }) {
   const [signing, setSigning] = useState(false);
   const { data } = proving;
   const { batch } = data;
   return (
-    <div className="flex min-w-0 flex-col pt-3">
+    <div className="flex min-w-0 flex-col pt-3 lg:min-h-0 lg:scroll-pb-44 lg:overflow-y-auto">
       <div className="flex-1 px-6 pb-6 max-md:px-4">
         <div className="mb-2 flex flex-wrap items-center gap-x-3.5 gap-y-1">
           <h1 className="sr-only">Prove the certificate of {batch.number}</h1>

@@ -14,8 +14,8 @@ import { useProving, type Proving } from './use-proving';
 export function ProveScreen({ certificateId }: { certificateId: string }) {
   const proving = useProving(certificateId);
   return (
-    <div className="-mx-6 -mb-9 grid grid-cols-1 max-md:-mx-4 lg:min-h-[calc(100dvh-48px)] lg:grid-cols-[minmax(0,676fr)_minmax(0,764fr)]">
-      <div className="min-w-0 border-ink max-lg:border-b-heavy lg:sticky lg:top-0 lg:flex lg:h-[calc(100dvh-48px)] lg:border-r-heavy [&>*]:flex-1">
+    <div className="-mx-6 -mb-9 grid grid-cols-1 max-md:-mx-4 lg:h-[calc(100dvh-3rem)] lg:min-h-[36rem] lg:grid-cols-[minmax(0,676fr)_minmax(0,764fr)] print:h-auto">
+      <div className="min-w-0 border-ink max-lg:border-b-heavy lg:flex lg:min-h-0 lg:border-r-heavy [&>*]:flex-1">
         <Viewed proving={proving} />
       </div>
       <ProvePanel proving={proving} />

@@ -77,7 +77,7 @@ function SourceWords({ requirement }: { requirement: ProvedRequirement }) {
   const { characteristic, source, sourceText } = requirement;
   return (
     <>
-      {characteristic}: {limitWords(requirement) || 'must be stated'}. <span className="text-source text-faint">{sourceText || `From the ${SOURCES[source]}.`}</span>
+      {characteristic}: {limitWords(requirement) || 'must be stated'}. <span className="text-source text-faint">{sourceText ? `${sourceText}.` : `From the ${SOURCES[source]}.`}</span>
     </>
   );
 }

@@ -35,10 +35,10 @@ function RequirementRow({ requirement, proving }: { requirement: ProvedRequireme
         <Cell>
           <RowButton rowId={id} selected={selected} says={characteristic} onSelect={() => proving.select(id)} onConfirm={canEdit ? confirm : undefined} />
         </Cell>
-        <Cell code head="Ordered">
+        <Cell code head="Ordered" className="text-[0.78rem]">
           {limitWords(requirement)}
         </Cell>
-        <Cell code strong head="As stated">
+        <Cell code strong head="As stated" className="text-[0.78rem] [overflow-wrap:anywhere]">
           {decision?.stated}
         </Cell>
         <Cell>
@@ -54,7 +54,7 @@ function RequirementRow({ requirement, proving }: { requirement: ProvedRequireme
 }
 
 function YourPart({ requirement: { decision } }: { requirement: ProvedRequirement }) {
-  if (!decision) return <strong className="font-cond">to decide</strong>;
+  if (!decision) return null;
   if (decision.sealed) return <span className="text-quiet">signed</span>;
   return <span className="text-quiet">{decision.overrideReason ? 'overridden' : 'decided'}</span>;
 }

@@ -46,7 +46,7 @@ export function SignStep({ proving, onBack, onSigned }: SignStepProps) {
   };
 
   return (
-    <form noValidate onSubmit={sign} aria-label="Sign" className="border-t-heavy border-ink bg-bench px-6 py-3 max-md:px-4">
+    <form noValidate onSubmit={sign} aria-label="Sign" className="sticky bottom-0 z-10 border-t-heavy border-ink bg-bench px-6 py-3 max-md:static max-md:px-4">
       <div className="grid grid-cols-1 gap-x-6 gap-y-3 md:grid-cols-[minmax(0,1fr)_268px]">
         <WhatIsSigned proving={proving} />
         <div className="flex flex-col gap-3">

@@ -27,9 +27,9 @@ export function SerialCounts({ line, at }: { line: ReceivingLine; at: number }) 
       <ul aria-label={`Serial numbers of line ${line.lineNo}`} className="pt-2">
         {line.awayPieces.map((piece) => (
           <li key={piece.id} className="border-b border-rule">
-            <fieldset className="flex flex-wrap items-center gap-x-6">
+            <fieldset className="flex flex-wrap items-center gap-x-6 max-md:gap-x-3.5">
               <legend className="sr-only">Piece {piece.serial}</legend>
-              <span aria-hidden="true" className="num min-w-28 font-semibold">
+              <span aria-hidden="true" className="num min-w-28 max-md:min-w-16 font-semibold">
                 {piece.serial}
               </span>
               {STATES.map(({ value, says }) => (
