@@ -94,14 +94,18 @@ function Fact({ caption, says }: { caption: string; says: string }) {
 
 /** `proved 20 Apr 2026, cert. 26-04177-1, batch B-0404. Scan for the dossier.` A label outlives the year. */
 function footWords(release: Release, clock: Clock): string {
-  const { provedOn, certificates, batchNumber } = release;
+  const { provedOn, certificates, batchNumber, serials } = release;
   const parts = [
+    serials.length > 0 ? serialWords(serials) : null,
     provedOn === null ? null : `proved ${withYear(provedOn, clock)}`,
     certificates.length > 0 ? `cert. ${certificates.slice(0, 2).join(', ')}${certificates.length > 2 ? ` and ${certificates.length - 2} more` : ''}` : null,
     `batch ${batchNumber}`,
   ];
   return `${parts.filter(Boolean).join(', ')}. Scan for the dossier.`;
 }
+
+const MOST_SERIALS = 6;
+const serialWords = (serials: readonly string[]) => `${serials.slice(0, MOST_SERIALS).join(' ')}${serials.length > MOST_SERIALS ? ` and ${serials.length - MOST_SERIALS} more` : ''}`;
 
 function withYear(day: string, clock: Clock): string {
   const words = shortDayWords(day, clock);

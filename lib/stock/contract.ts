@@ -156,6 +156,8 @@ export const Release = z.object({
   /** Where they go on to instead of a place in stock. */
   nextProcess: z.enum(PROCESSES).nullable(),
   batchNumber: z.string(),
+  /** Names of the pieces, where the lot's pieces have names. */
+  serials: z.array(z.string()),
   certificates: z.array(z.string()),
   provedOn: Day.nullable(),
   releasedBy: z.string(),

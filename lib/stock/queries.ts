@@ -114,6 +114,8 @@ export async function listReleases(ctx: Ctx, { batchId }: { batchId: string }) {
       r.pieces, l.name as location, case when r.location_id is null then
         (select x.process from route_steps x where x.part_id = s.part_id and x.seq > s.seq order by x.seq limit 1) end as "nextProcess",
       b.number as "batchNumber",
+      coalesce((select jsonb_agg(c.serial order by c.serial) from movements m join pieces c on c.id = any (m.piece_ids)
+        where m.lot_id = r.lot_id and m.batch_line_id = r.line_id and m.reason = 'released' and m.moved_at = r.released_at), '[]') as serials,
       coalesce((select jsonb_agg(distinct c.number) filter (where c.number is not null) from coverage v join certificates c on c.id = v.certificate_id where v.line_id = n.id), '[]') as certificates,
       (select to_char(max(g.signed_at) at time zone h.zone, 'YYYY-MM-DD') from coverage v join signatures g on g.id = v.signature_id where v.line_id = n.id) as "provedOn",
       r.released_by as "releasedBy", to_char(r.released_at at time zone 'UTC', 'YYYY-MM-DD"T"HH24:MI:SS.MS"Z"') as "releasedAt"
