@@ -11,6 +11,7 @@ import { addLocation } from '@/lib/stock/add-location';
 import { campaignThread, type Campaign } from './campaign';
 import { ASSEMBLIES, catalogue, ROUTES } from './catalogue';
 import { addDays, dayOf, seedOrganisations, type DemoPerson } from './organisations';
+import { seedPaymentService } from './payment-service';
 import { openStage, playAll, StagePlay, type Thread } from './stage-play';
 import { CAMPAIGNS, OTHER_YARD } from './story';
 
@@ -24,6 +25,7 @@ async function main(): Promise<void> {
   const stage = openStage(env.DATABASE_URL);
   try {
     const cast = await seedOrganisations(drizzle(owner), { since: subDays(today, 365), today });
+    await seedPaymentService(drizzle(owner), cast);
     const play = new StagePlay(stage.db, cast, today);
     const ours = await openYard(play, { shopId: cast.shopId, lead: cast.people.lead, inspector: cast.people.inspector, office: cast.people.office, parts: catalogue(), stores: ['Rack A 1', 'Rack A 2', 'Bin cabinet, drawer 14', 'Float shelf'] });
     const theirs = await openYard(play, { shopId: cast.otherShopId, lead: cast.otherOwner, inspector: cast.otherOwner, office: cast.otherOwner, parts: otherParts(), stores: ['Shelf 1'] });

@@ -4,7 +4,7 @@ import { encode } from 'next-auth/jwt';
 import pg from 'pg';
 
 import { createDatabase, dropDatabase } from '@/db/cluster';
-import { migrate } from '@/db/migrate';
+import { prepareDatabase } from '@/lib/stack/prepare-database';
 import { env } from '@/lib/env';
 
 import { dispatches } from './dispatches';
@@ -26,7 +26,7 @@ async function main(): Promise<void> {
   await createDatabase(superUrl, DATABASE);
   const ownerUrl = urlOf(env.DATABASE_OWNER_URL, null, DATABASE);
   const appUrl = urlOf(env.DATABASE_URL, null, DATABASE);
-  await migrate(ownerUrl);
+  await prepareDatabase(ownerUrl);
   const client = new pg.Client({ connectionString: ownerUrl });
   await client.connect();
   console.log(`Filling ${LOTS.toLocaleString('en-US')} lots and ${BATCHES.toLocaleString('en-US')} batches …`);

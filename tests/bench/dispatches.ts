@@ -22,8 +22,8 @@ export async function dispatches(appUrl: string, { shopId, userId }: Filled, { b
       const step = { process: 'solution_heat_treat_and_age' as const, specification: 'AMS 2770', specificationRevision: 'R', classType: '', conditionBefore: 'O', targetCondition: 'T42', note: '', toProve: [{ characteristic: 'Hardness', limit: '63 or more', unit: 'HRB', source: 'specification' as const, sourceText: '' }] };
       const made = await createPart(ctx, { number: 'BENCH-1', revision: 'A', name: 'Bench bracket', alloy: '2024', form: 'sheet', clad: false, thickness: '0.040 in', madeCondition: 'O', endCondition: 'T42', length: '', width: '', height: '', mass: '', area: '', serialised: false, note: '', drawingFileId: null, route: [step] });
       const { route } = await getPart(ctx, { partId: made.id });
-      const [processor] = (await listProcessors(ctx)).rows;
-      return { partId: made.id, stepId: route[0]?.id ?? '', processorId: processor?.id ?? '' };
+      const [processor] = (await listProcessors(ctx, { limit: 1, active: undefined, after: undefined })).rows;
+      return { partId: made.id, stepId: route[0]?.id ?? '', processorId: processor?.processorId ?? '' };
     });
     const batches = [];
     for (let at = 0; at < COUNT; at++) {
