@@ -33,20 +33,20 @@ const byName = new Map(Object.values(import.meta.glob<Record<string, Endpoint>>(
 
 const isWrite = (endpoint: string): boolean => byName.get(`${endpoint}Endpoint`)?.declaration.method !== 'get';
 
-/** Whether a function reaches a call, directly or through functions of the product, some steps deep. */
-function reaches(file: string, name: string, wanted: readonly string[], depth = 5, seen = new Set<string>()): boolean {
+/** Whether a function reaches one of the calls, directly or through functions of the product, some steps deep. */
+function reaches(file: string, name: string, wanted: readonly string[], at = { depth: 5, seen: new Set<string>() }): boolean {
   const mark = `${file}#${name}`;
-  if (depth < 0 || seen.has(mark)) return false;
-  seen.add(mark);
+  if (at.depth < 0 || at.seen.has(mark)) return false;
+  at.seen.add(mark);
   const functions = functionsOf(file);
   const own = functions.find((one) => one.name === name);
   if (!own) return false;
   if (own.calls.some((call) => wanted.includes(call))) return true;
   const imports = importsOf(file);
   return own.calls.some((call) => {
-    if (functions.some((one) => one.name === call)) return reaches(file, call, wanted, depth, seen);
+    if (functions.some((one) => one.name === call)) return reaches(file, call, wanted, at);
     const from = imports.get(call);
-    return from !== undefined && from.from.startsWith('lib/') && reaches(from.from, from.name, wanted, depth - 1, seen);
+    return from !== undefined && from.from.startsWith('lib/') && reaches(from.from, from.name, wanted, { ...at, depth: at.depth - 1 });
   });
 }
 

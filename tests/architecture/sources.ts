@@ -30,19 +30,17 @@ interface FunctionSource {
 /** The functions that a file declares at its top, with what they call. */
 export const functionsOf = remembered((file: string): FunctionSource[] => {
   return sourceOf(file).statements.flatMap((statement) => {
-    if (ts.isFunctionDeclaration(statement) && statement.name && statement.body) return [functionSource(file, statement.name.text, statement, statement.body)];
+    if (ts.isFunctionDeclaration(statement) && statement.name && statement.body) return [functionSource({ file, name: statement.name.text, isExported: isExported(statement) }, statement, statement.body)];
     if (!ts.isVariableStatement(statement)) return [];
     return statement.declarationList.declarations.flatMap(({ name, initializer }) =>
-      ts.isIdentifier(name) && initializer && ts.isArrowFunction(initializer) ? [functionSource(file, name.text, initializer, initializer.body, isExported(statement))] : [],
+      ts.isIdentifier(name) && initializer && ts.isArrowFunction(initializer) ? [functionSource({ file, name: name.text, isExported: isExported(statement) }, initializer, initializer.body)] : [],
     );
   });
 });
 
-function functionSource(file: string, name: string, node: ts.FunctionDeclaration | ts.ArrowFunction, body: ts.ConciseBody, exported = isExported(node)): FunctionSource {
+function functionSource(named: Pick<FunctionSource, 'file' | 'name' | 'isExported'>, node: ts.FunctionDeclaration | ts.ArrowFunction, body: ts.ConciseBody): FunctionSource {
   return {
-    file,
-    name,
-    isExported: exported,
+    ...named,
     parameters: node.parameters.map((parameter) => parameter.type?.getText() ?? ''),
     calls: callsIn(body),
     first: ts.isBlock(body) ? (body.statements[0]?.getText() ?? '') : body.getText(),
