@@ -78,8 +78,9 @@ export const Batch = z.object({
   processor: z.string(),
   contactEmail: z.string(),
   process: z.enum(PROCESSES),
-  /** With revision and class. */
+  /** With revision and class, in words; its parts stand in `step`. */
   specification: z.string(),
+  step: z.object({ specification: z.string(), specificationRevision: z.string().nullable(), classType: z.string().nullable() }),
   note: z.string().nullable(),
   leavesOn: z.string().nullable(),
   wantedBackOn: z.string().nullable(),
@@ -124,6 +125,7 @@ export const BatchLine = z.object({
   id: Id,
   lineNo: z.int(),
   lotId: Id,
+  stepId: Id,
   partId: Id,
   lotNumber: z.string(),
   partNumber: z.string(),

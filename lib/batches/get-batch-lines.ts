@@ -39,6 +39,7 @@ export async function getBatchLines(ctx: Ctx, { batchId }: { batchId: string }) 
       id: line.id,
       lineNo: line.lineNo,
       lotId: line.lotId,
+      stepId: line.stepId,
       partId: part.id,
       pieces: line.pieces,
       waiting: waiting.find((one) => one.lineId === line.id)?.pieces ?? 0,

@@ -63,7 +63,8 @@ export async function getBatch(ctx: Ctx, { batchId }: { batchId: string }) {
     .where(eq(batches.id, batchId));
   if (!found) throw notFound('batch');
   const { batch, processor, contactEmail, dispatcher, zone, latenessBasis } = found;
-  return { ...batch, processor, contactEmail, zone, dispatchedBy: dispatcher, specification: specificationWords(batch), daysLate: lateOf(ctx, { ...batch, zone, latenessBasis }) };
+  const { specification, specificationRevision, classType } = batch;
+  return { ...batch, step: { specification, specificationRevision, classType }, processor, contactEmail, zone, dispatchedBy: dispatcher, specification: specificationWords(batch), daysLate: lateOf(ctx, { ...batch, zone, latenessBasis }) };
 }
 
 interface Promised {

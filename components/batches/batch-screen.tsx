@@ -1,0 +1,80 @@
+'use client';
+import { useRead } from '@/components/api/use-api';
+import { History } from '@/components/audit/history';
+import { CertificatesSection } from '@/components/certificates/certificates-section';
+import { InvoicesSection } from '@/components/invoices/invoices-section';
+import { NonconformancesSection } from '@/components/nonconformances/nonconformances-section';
+import { ReceiptsSection } from '@/components/receipts/receipts-section';
+import { ReleaseSection } from '@/components/stock/release-section';
+import { MainAndSide } from '@/components/ui/section';
+import { getBatch } from '@/lib/batches/contract';
+
+import { BatchHead, HowItStands } from './batch-head';
+import { ChecksSection } from './checks-section';
+import { LinesSection } from './lines-section';
+import { PriceSection } from './price-section';
+import { RequirementsSection } from './requirements-section';
+import { RideAlongSection } from './ride-along-section';
+import { TermsSection } from './terms-section';
+import { TravellerSection } from './traveller-section';
+
+/** One batch: while it is here, what it takes to send it; once it left, how it comes back. Each section reads for itself. */
+export function BatchScreen({ batchId }: { batchId: string }) {
+  const { data: batch } = useRead(getBatch, { batchId });
+  const isHere = batch.dispatchedAt === null;
+  return (
+    <>
+      <BatchHead batchId={batchId} />
+      {isHere ? <Building batchId={batchId} isOpen={batch.cancelledAt === null} /> : <Sent batchId={batchId} />}
+    </>
+  );
+}
+
+function Building({ batchId, isOpen }: { batchId: string; isOpen: boolean }) {
+  return (
+    <MainAndSide
+      main={
+        <>
+          <LinesSection batchId={batchId} />
+          <RequirementsSection batchId={batchId} />
+          {isOpen && <TermsSection batchId={batchId} />}
+          {isOpen && <RideAlongSection batchId={batchId} />}
+          <History entity="batch" id={batchId} title="What was done" />
+        </>
+      }
+      side={
+        <>
+          {isOpen && <ChecksSection batchId={batchId} />}
+          <PriceSection batchId={batchId} />
+          <TravellerSection batchId={batchId} />
+        </>
+      }
+    />
+  );
+}
+
+function Sent({ batchId }: { batchId: string }) {
+  return (
+    <MainAndSide
+      main={
+        <>
+          <HowItStands batchId={batchId} />
+          <LinesSection batchId={batchId} />
+          <ReceiptsSection batchId={batchId} />
+          <CertificatesSection batchId={batchId} dispatched />
+          <NonconformancesSection batchId={batchId} dispatched />
+          <InvoicesSection batchId={batchId} dispatched />
+          <ReleaseSection batchId={batchId} />
+          <RequirementsSection batchId={batchId} />
+          <History entity="batch" id={batchId} title="What was done" />
+        </>
+      }
+      side={
+        <>
+          <TravellerSection batchId={batchId} />
+          <PriceSection batchId={batchId} />
+        </>
+      }
+    />
+  );
+}

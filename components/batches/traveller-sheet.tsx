@@ -1,0 +1,96 @@
+import type { TravellerSays } from '@/lib/batches/paper-contract';
+import { dayWords } from '@/lib/day-words';
+import { PROCESS_WORDS } from '@/lib/parts/process';
+
+// Paper outlives its year, so it names it: seen from here no day is of this year.
+const ALWAYS_WITH_YEAR = new Date(0);
+
+/** What the traveller says, on a white sheet: small beside the batch, large on its own page. The printed one is made from the same words. */
+export function TravellerSheet({ says, small = false }: { says: TravellerSays; small?: boolean }) {
+  const day = (when: string) => dayWords(when, { zone: says.zone, now: ALWAYS_WITH_YEAR });
+  const pieces = says.lines.reduce((sum, line) => sum + line.pieces, 0);
+  const version = says.documentVersion === 0 ? 'draft' : `version ${says.documentVersion}`;
+  return (
+    <div className={`lw-sheet border border-rule bg-white text-[#1e2326] ${small ? 'p-3 text-[9px] leading-3' : 'mx-auto max-w-[816px] p-6 text-row md:p-9'}`}>
+      <div className="flex items-center border-heavy border-current px-3 py-1">
+        <span className={`rounded-full border-heavy border-current ${small ? 'size-2.5' : 'size-6'}`} />
+        <strong className={`pl-3 font-mono ${small ? 'text-[15px]' : 'text-[2.2rem] leading-10'}`}>{says.number}</strong>
+        <span className={`ml-auto font-cond ${small ? 'text-[10px]' : 'text-word'}`}>{`Traveller, ${version}`}</span>
+      </div>
+      <p className={small ? 'mt-1.5' : 'mt-4'}>
+        <strong>{says.processor.name}</strong>, from {says.shop.name}. Order <span className="num">{says.orderNumber}</span>.{says.wantedBackOn && ` Wanted back ${day(says.wantedBackOn)}.`}
+        <br />
+        {PROCESS_WORDS[says.process]}, {says.specification}. {pieces.toLocaleString('en-US')} pieces.
+      </p>
+      {says.changes.length > 0 && <p className="mt-2 border-l-4 border-current pl-2">{`Different from version ${says.documentVersion - 1}: ${says.changes.join('; ')}.`}</p>}
+      <SheetLines lines={says.lines} small={small} />
+      {says.note && <p className="mt-2">{says.note}</p>}
+      <div className={small ? 'mt-1.5' : 'mt-5 grid gap-6 md:grid-cols-2'}>
+        <SheetList title="Must be proved" small={small} items={says.requirements.map((one) => `${one.characteristic} ${[one.limit, one.unit].filter(Boolean).join(' ')}${one.lines.length > 0 ? `, ${one.lines.length === 1 ? 'line' : 'lines'} ${one.lines.join(', ')}` : ''}`)} />
+        <SheetList title="Cautions" small={small} items={[...says.cautions, ...says.overrides.map((one) => `Let pass: ${one.what}. ${one.reason} ${one.by}.`)]} />
+      </div>
+      {!small && <p className="mt-5 text-source">The drawing, the order and the governing specification at the revision named come first, then this page. It releases nothing by itself.</p>}
+    </div>
+  );
+}
+
+function SheetLines({ lines, small }: { lines: TravellerSays['lines']; small: boolean }) {
+  const cell = small ? 'py-px pr-1.5' : 'border-b border-current/20 py-1.5 pr-3';
+  return (
+    <div className="overflow-x-auto">
+      <table className={`w-full text-left ${small ? 'mt-1.5 text-[8.5px] leading-[10px]' : 'mt-4'}`}>
+        {!small && (
+          <thead>
+            <tr className="border-b border-current font-cond text-caption">
+              {['', 'Lot', 'Part and revision', '', 'Material, heat', 'Thickness', 'From, to', 'Pieces'].map((name, at) => (
+                <th key={at} scope="col" className="pr-3 font-normal">
+                  {name || <span className="sr-only">{at === 0 ? 'Line' : 'Name'}</span>}
+                </th>
+              ))}
+            </tr>
+          </thead>
+        )}
+        <tbody>
+          {lines.map((line) => (
+            <tr key={line.lineNo}>
+              <td className={`${cell} font-mono`}>{line.lineNo}</td>
+              <td className={`${cell} font-mono`}>{line.lotNumber}</td>
+              <td className={`${cell} font-mono`}>{`${line.partNumber} ${line.partRevision}`}</td>
+              <td className={cell}>{line.partName}</td>
+              {!small && (
+                <td className={cell}>
+                  {line.material} <span className="font-mono">{line.heat}</span>
+                </td>
+              )}
+              <td className={`${cell} font-mono`}>{line.thickness}</td>
+              <td className={`${cell} font-mono`}>{[line.conditionBefore, line.targetCondition].filter(Boolean).join(small ? '-' : ' to ')}</td>
+              <td className={`${cell} text-right font-mono`}>{line.pieces}</td>
+            </tr>
+          ))}
+        </tbody>
+      </table>
+    </div>
+  );
+}
+
+function SheetList({ title, items, small }: { title: string; items: readonly string[]; small: boolean }) {
+  if (small) {
+    return (
+      <p>
+        <strong>{title}:</strong> {items.join('; ')}
+      </p>
+    );
+  }
+  return (
+    <div>
+      <h3 className="border-t-heavy border-current pt-1">{title}</h3>
+      <ul>
+        {items.map((item) => (
+          <li key={item} className="border-b border-current/20 py-1">
+            {item}
+          </li>
+        ))}
+      </ul>
+    </div>
+  );
+}
