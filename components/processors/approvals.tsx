@@ -61,8 +61,8 @@ function ApprovalRow({ approval, clock, withdraw }: { approval: Approval; clock:
       </Cell>
       <Cell head="Processes">{approval.processes.map((process) => PROCESS_WORDS[process]).join(', ')}</Cell>
       <Cell head="Specifications">{approval.specifications.length === 0 ? <span className="text-quiet">any for these processes</span> : approval.specifications.join(', ')}</Cell>
-      <Cell head="From">{shortDayWords(approval.validFrom, clock)}</Cell>
-      <Cell head="To">
+      <Cell head="From" className="whitespace-nowrap">{shortDayWords(approval.validFrom, clock)}</Cell>
+      <Cell head="To" className="whitespace-nowrap">
         <ApprovalEnd day={approval.validTo} clock={clock} />
       </Cell>
       <Cell right>

@@ -56,7 +56,7 @@ function ProcessorLine({ row, clock }: { row: ProcessorRow; clock: Clock }) {
         {row.contactName} <span className="text-quiet">{row.contactEmail}</span>
       </Cell>
       <Cell head="Approved today for">{row.processes.length === 0 ? <span className="text-held-ink">nothing</span> : row.processes.map((process) => PROCESS_WORDS[process]).join(', ')}</Cell>
-      <Cell head="First end">{row.approvalEndsOn !== null && <ApprovalEnd day={row.approvalEndsOn} clock={clock} />}</Cell>
+      <Cell head="First end" className="whitespace-nowrap">{row.approvalEndsOn !== null && <ApprovalEnd day={row.approvalEndsOn} clock={clock} />}</Cell>
       <Cell figure head="Batches">
         {row.openBatches || ''}
       </Cell>

@@ -15,29 +15,38 @@ import { getMe } from '@/lib/session/contract';
 import { NameForm } from './name-form';
 import { PasswordForm } from './password-form';
 
-interface AccountScreenProps {
+interface AccountSectionsProps {
   /** Signs in anew after the password was changed. */
   signIn: SignInAction;
+  /** The page that shows these sections; the way back after the password was changed. */
+  page: string;
 }
 
-/** What belongs to the person, whichever organisation they work for just now. */
-export function AccountScreen({ signIn }: AccountScreenProps) {
+export function AccountScreen(props: AccountSectionsProps) {
   const { data: account } = useRead(getAccount, {});
   return (
     <>
       <PageHead title="My account" sub={account.email} />
-      <div className="flex max-w-[40rem] flex-col gap-7">
-        <Section title="Name">
-          <NameForm name={account.name} email={account.email} />
-        </Section>
-        <Choices account={account} />
-        <Section title="Password" note={account.hasPassword ? 'also what you sign certificates with' : 'you sign in by mailed link'}>
-          {account.hasPassword ? <PasswordForm signIn={signIn} /> : <FirstPassword email={account.email} />}
-        </Section>
-        <Sessions />
-        {account.organisations.length > 1 && <Organisations account={account} />}
-      </div>
+      <AccountSections {...props} />
     </>
+  );
+}
+
+/** What belongs to the person, whichever organisation they work for just now. */
+export function AccountSections({ signIn, page }: AccountSectionsProps) {
+  const { data: account } = useRead(getAccount, {});
+  return (
+    <div className="flex max-w-[40rem] flex-col gap-7">
+      <Section title="Name">
+        <NameForm name={account.name} email={account.email} />
+      </Section>
+      <Choices account={account} />
+      <Section title="Password" note={account.hasPassword ? 'also what you sign certificates with' : 'you sign in by mailed link'}>
+        {account.hasPassword ? <PasswordForm signIn={signIn} page={page} /> : <FirstPassword email={account.email} />}
+      </Section>
+      <Sessions />
+      {account.organisations.length > 1 && <Organisations account={account} />}
+    </div>
   );
 }
 

@@ -12,14 +12,14 @@ import { showMessage } from '@/components/ui/message';
 import { changePassword } from '@/lib/people/account-contract';
 
 /** Every session ends with the old password; this browser goes straight in with the new one. */
-export function PasswordForm({ signIn }: { signIn: SignInAction }) {
+export function PasswordForm({ signIn, page }: { signIn: SignInAction; page: string }) {
   const write = useWrite(changePassword);
   const [isEntering, enter] = useTransition();
   const form = useForm({ defaultValues: { current: '', password: '' } });
   const { errors } = form.formState;
   const done = (email: string, password: string) => {
     const fields = new FormData();
-    for (const [name, value] of Object.entries({ email, password, next: '/settings/account' })) fields.set(name, value);
+    for (const [name, value] of Object.entries({ email, password, next: page })) fields.set(name, value);
     form.reset();
     enter(async () => {
       await signIn({}, fields);

@@ -4,6 +4,7 @@ import { acceptInvitation, readInvitation } from './accept-invitation';
 import * as account from './account-contract';
 import { changeRoles, setPersonActive } from './change-member';
 import { changePassword, proveCurrentPassword } from './change-password';
+import { inviteColleague, listColleagues, setColleagueActive } from './colleagues';
 import { createToken } from './create-token';
 import { endMySessions } from './end-my-sessions';
 import { invitePerson, renewInvitation, withdrawInvitation } from './invite-person';
@@ -34,6 +35,10 @@ export const renewInvitationEndpoint = endpoint(team.renewInvitation, renewInvit
 export const withdrawInvitationEndpoint = endpoint(team.withdrawInvitation, withdrawInvitation);
 export const changeRolesEndpoint = endpoint(team.changeRoles, changeRoles);
 export const setPersonActiveEndpoint = endpoint(team.setPersonActive, setPersonActive);
+
+export const listColleaguesEndpoint = endpoint(team.listColleagues, listColleagues);
+export const inviteColleagueEndpoint = endpoint(team.inviteColleague, inviteColleague);
+export const setColleagueActiveEndpoint = endpoint(team.setColleagueActive, setColleagueActive);
 
 export const listTokensEndpoint = endpoint(token.listTokens, listTokens);
 export const createTokenEndpoint = endpoint(token.createToken, createToken);

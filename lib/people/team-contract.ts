@@ -95,3 +95,39 @@ export const setPersonActive = declare({
   input: z.object({ personId: Id, active: z.boolean(), version: z.int() }),
   response: z.object({ version: z.int() }),
 });
+
+export const Colleague = z.object({ personId: Id, name: z.string(), email: z.string(), active: z.boolean(), isMe: z.boolean() });
+export type Colleague = z.output<typeof Colleague>;
+
+export const listColleagues = declare({
+  id: 'listColleagues',
+  method: 'get',
+  path: '/portal/people',
+  summary: 'People of the processor; each sees the batches of all its customers',
+  side: 'portal',
+  permission: 'portal.account',
+  input: z.object({}),
+  response: z.object({ people: z.array(Colleague) }),
+});
+
+export const inviteColleague = declare({
+  id: 'inviteColleague',
+  method: 'post',
+  path: '/portal/people/invitations',
+  summary: 'Invite a colleague to the processor’s side by mail',
+  side: 'portal',
+  permission: 'portal.account',
+  input: z.object({ email: Email, name: PersonName }),
+  response: Done,
+});
+
+export const setColleagueActive = declare({
+  id: 'setColleagueActive',
+  method: 'post',
+  path: '/portal/people/{personId}/active',
+  summary: 'Close or open a colleague’s way to the processor’s side',
+  side: 'portal',
+  permission: 'portal.account',
+  input: z.object({ personId: Id, active: z.boolean() }),
+  response: Done,
+});

@@ -1,7 +1,12 @@
 import type { Metadata } from 'next';
 
+import { ask, Prefetched } from '@/app/_kit/prefetch';
+import { signInWithForm } from '@/app/_kit/sign-in';
 import { PayoutAccount } from '@/components/payments/payout-account';
+import { Colleagues } from '@/components/people/colleagues';
+import { AccountSections } from '@/components/settings/account-screen';
 import { PageHead } from '@/components/ui/page-head';
+import { getAccountEndpoint, listColleaguesEndpoint } from '@/lib/people/endpoints';
 
 import { PortalFrame } from '../portal-frame';
 
@@ -16,8 +21,14 @@ export default async function AccountPage({ searchParams }: AccountPageProps) {
   return (
     <PortalFrame>
       <PageHead title="Account" />
-      <div className="max-w-prose">
+      <div className="flex max-w-[40rem] flex-col gap-7">
         <PayoutAccount came={cameFrom(back, again)} />
+        <Prefetched queries={[ask(listColleaguesEndpoint, {})]}>
+          <Colleagues />
+        </Prefetched>
+        <Prefetched queries={[ask(getAccountEndpoint, {})]}>
+          <AccountSections signIn={signInWithForm} page="/portal/account" />
+        </Prefetched>
       </div>
     </PortalFrame>
   );

@@ -10,7 +10,7 @@ export const metadata: Metadata = { title: 'My account' };
 export default function AccountPage() {
   return (
     <Prefetched queries={[ask(getAccountEndpoint, {})]}>
-      <AccountScreen signIn={signInWithForm} />
+      <AccountScreen signIn={signInWithForm} page="/settings/account" />
     </Prefetched>
   );
 }
