@@ -1,5 +1,6 @@
 import { eq } from 'drizzle-orm';
 import { expect, test } from 'vitest';
+import type { z } from 'zod';
 
 import { approvals, processors, shopProcessors } from '@/db/schema/organisations';
 import { invitations, memberships } from '@/db/schema/people';
@@ -8,6 +9,7 @@ import { newId } from '@/lib/ids';
 import { acceptInvitation } from '@/lib/people/accept-invitation';
 import { addProcessor } from '@/lib/processors/add-processor';
 import { addApproval, withdrawApproval } from '@/lib/processors/approvals';
+import type { addProcessor as declaration } from '@/lib/processors/contract';
 import { inviteProcessor } from '@/lib/processors/invite-processor';
 import { getProcessor, listProcessors } from '@/lib/processors/queries';
 import { updateProcessor } from '@/lib/processors/update-processor';
@@ -21,7 +23,7 @@ import { runJobs } from '../run-jobs';
 
 const base = openDatabase();
 
-const given = () => ({ name: 'Cinder Vale Plating', email: `desk-${newId()}@cinder.test`, phone: '555 0177', contactName: 'Ona Reyes', contactEmail: null, note: null });
+const given = (): z.output<(typeof declaration)['input']> => ({ name: 'Cinder Vale Plating', email: `desk-${newId()}@cinder.test`, phone: '555 0177', contactName: 'Ona Reyes', contactEmail: null, note: null });
 const add = (world: World, input = given()) => world.as(['admin'], (ctx) => addProcessor(ctx, input));
 const year = { reference: 'Q-200', processes: ['anodize' as const], specifications: ['MIL-A-8625'], validFrom: '2026-01-01', validTo: '2026-12-31' };
 
