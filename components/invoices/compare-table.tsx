@@ -6,7 +6,8 @@ import { amountText } from '@/lib/money';
 import { compareRows, payableNow, type CompareRow } from './compare-rows';
 import { Difference } from './difference-cell';
 
-const EDGE = 'border-l border-l-rule pl-3';
+// Only while it is a table: on a phone each row is a block.
+const EDGE = 'border-l border-l-rule pl-3 max-sm:border-l-0';
 const GROUP = 'border-b-0 pb-0 font-cond text-sub text-ink';
 
 /** Ordered, accepted and invoiced, line by line, with each difference and its way out. */
@@ -15,7 +16,6 @@ export function CompareTable({ invoice }: { invoice: InvoiceDetail }) {
   const rows = compareRows(invoice);
   const payable = payableNow(invoice);
   const over = (totalMinor ?? 0) - payable;
-  const cleared = differences.filter((one) => one.clearance !== null).length;
   return (
     <div className="lw-table-box border-t-heavy border-ink">
       <table role="table" aria-label="Invoice against order and accepted pieces" className="lw-table">
@@ -42,19 +42,30 @@ export function CompareTable({ invoice }: { invoice: InvoiceDetail }) {
               {amountText(totalMinor ?? 0)}
             </Cell>
             <Cell className={EDGE}>
-              {over > 0 && (
-                <>
-                  <span className="num text-held-ink">{amountText(over)}</span> <span className="text-held-ink">over what may be paid</span>
-                  {differences.length > 0 && ', '}
-                </>
-              )}
-              {differences.length > 0 && `${cleared} of ${differences.length} cleared`}
-              {differences.length === 0 && 'No difference'}
+              <OverWords over={over} all={differences.length} open={differences.filter((one) => one.clearance === null).length} />
             </Cell>
           </Row>
         </tbody>
       </table>
     </div>
+  );
+}
+
+function OverWords({ over, all, open }: { over: number; all: number; open: number }) {
+  if (all === 0) return <>No difference</>;
+  const cleared = `${all - open} of ${all} cleared`;
+  if (over <= 0) return <>{cleared}</>;
+  return open === 0 ? (
+    <>
+      <span className="num">{amountText(over)}</span> left out, {cleared}
+    </>
+  ) : (
+    <>
+      <span className="text-held-ink">
+        <span className="num">{amountText(over)}</span> over what may be paid
+      </span>
+      , {cleared}
+    </>
   );
 }
 
@@ -130,13 +141,13 @@ function CompareLine({ row, invoice }: { row: CompareRow; invoice: InvoiceDetail
       <Cell figure head="at">
         {money(ordered?.eachMinor)}
       </Cell>
-      <Cell figure head="makes">
+      <Cell figure head={sumHead('Ordered', ordered)}>
         {money(ordered?.minor)}
       </Cell>
       <Cell figure head="Accepted" className={`${EDGE} ${has('quantity_above_accepted')}`}>
         {accepted?.pieces ?? ''}
       </Cell>
-      <Cell figure head="makes">
+      <Cell figure head={sumHead('Accepted', accepted)}>
         {money(accepted?.minor)}
       </Cell>
       <Cell figure head="Invoiced" className={EDGE}>
@@ -145,7 +156,7 @@ function CompareLine({ row, invoice }: { row: CompareRow; invoice: InvoiceDetail
       <Cell figure head="at" className={has('unit_price_mismatch')}>
         {money(invoiced?.eachMinor)}
       </Cell>
-      <Cell figure strong head="makes">
+      <Cell figure strong head={sumHead('Invoiced', invoiced)}>
         {money(invoiced?.minor)}
       </Cell>
       <Cell className={`${EDGE} max-sm:basis-full`}>
@@ -154,6 +165,9 @@ function CompareLine({ row, invoice }: { row: CompareRow; invoice: InvoiceDetail
     </Row>
   );
 }
+
+/** Said before a sum where the row is a block: what it is, unless the pieces before it said so. */
+const sumHead = (what: string, side: { pieces: number | null } | null): string => (side?.pieces == null ? what : 'makes');
 
 const money = (minor: number | null | undefined): string => (minor === null || minor === undefined ? '' : amountText(minor));
 

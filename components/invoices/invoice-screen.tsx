@@ -1,5 +1,7 @@
 'use client';
+import { useQueryClient } from '@tanstack/react-query';
 import Link from 'next/link';
+import { useEffect, useRef } from 'react';
 
 import { useLazyRead, useRead } from '@/components/api/use-api';
 import { History } from '@/components/audit/history';
@@ -8,8 +10,10 @@ import { Empty } from '@/components/ui/empty';
 import { PageHead } from '@/components/ui/page-head';
 import { MainAndSide } from '@/components/ui/section';
 import { BatchTag } from '@/components/ui/tag';
+import { listAudit } from '@/lib/audit/contract';
 import { dayWords, momentWords } from '@/lib/day-words';
-import { getInvoice, type InvoiceDetail } from '@/lib/invoices/contract';
+import { getInvoice, listInvoices, type InvoiceDetail } from '@/lib/invoices/contract';
+import { getGate } from '@/lib/stock/contract';
 
 import { AfterPaid } from './after-paid';
 import { CompareTable } from './compare-table';
@@ -25,7 +29,7 @@ const EVERY_MS = 2_000;
 export function InvoiceScreen({ invoiceId, entering }: { invoiceId: string; entering: boolean }) {
   const { data: invoice } = useRead(getInvoice, { invoiceId });
   const mayEnter = useMay('invoice.enter');
-  useLazyRead(getInvoice, { invoiceId }, { enabled: invoice.state === 'paying', refreshEveryMs: EVERY_MS });
+  useFollowed(invoice);
   if (mayEnter && invoice.approved === null && invoice.state !== 'refused' && (entering || invoice.state === 'to_enter')) return <EnterScreen key={invoice.version} invoice={invoice} />;
   return (
     <>
@@ -36,29 +40,44 @@ export function InvoiceScreen({ invoiceId, entering }: { invoiceId: string; ente
           <Steps invoice={invoice} />
         </>
       ) : (
-        <MainAndSide
-          wide
-          main={
-            <>
-              <div>
-                <MoneyRule invoice={invoice} />
-                <CompareTable invoice={invoice} />
-              </div>
-              <SeenBefore invoice={invoice} />
-              <History entity="invoice" id={invoice.id} title="What was done" />
-            </>
-          }
-          side={
-            <>
-              <MayBePaid invoice={invoice} />
-              <Steps invoice={invoice} />
-              <AfterPaid invoice={invoice} />
-            </>
-          }
-        />
+        <>
+          <MainAndSide
+            wide
+            main={
+              <>
+                <div>
+                  <MoneyRule invoice={invoice} />
+                  <CompareTable invoice={invoice} />
+                </div>
+                <SeenBefore invoice={invoice} />
+              </>
+            }
+            side={
+              <>
+                <MayBePaid invoice={invoice} />
+                <Steps invoice={invoice} />
+                <AfterPaid invoice={invoice} />
+              </>
+            }
+          />
+          <div className="pt-6">
+            <History entity="invoice" id={invoice.id} title="What was done" />
+          </div>
+        </>
       )}
     </>
   );
+}
+
+/** While it is being paid it is asked for again and again; when that ends, so is what hangs on it. */
+function useFollowed({ id, state }: InvoiceDetail): void {
+  const cache = useQueryClient();
+  const before = useRef(state);
+  useLazyRead(getInvoice, { invoiceId: id }, { enabled: state === 'paying', refreshEveryMs: EVERY_MS });
+  useEffect(() => {
+    if (before.current === 'paying' && state !== 'paying') for (const read of [getGate, listAudit, listInvoices]) void cache.invalidateQueries({ queryKey: [read.id] });
+    before.current = state;
+  }, [cache, state]);
 }
 
 function InvoiceHead({ invoice, mayEnter }: { invoice: InvoiceDetail; mayEnter: boolean }) {
@@ -91,9 +110,10 @@ function HeadWords({ invoice }: { invoice: InvoiceDetail }) {
     <>
       {invoice.processor}
       {datedOn && `, dated ${dayWords(datedOn, clock)}`}. From {sentBy}, {momentWords(new Date(createdAt), clock)}. Order <span className="num">{invoice.orderNumber}</span>.{' '}
+      {papers.length > 0 && (papers.length === 1 ? 'Certificate ' : 'Certificates ')}
       {papers.map((paper, at) => (
         <span key={paper.id}>
-          {at === 0 ? (papers.length === 1 ? 'Certificate ' : 'Certificates ') : ', '}
+          {at > 0 && ', '}
           <Link href={`/certificates/${paper.id}`} className="num">
             {paper.number ?? 'without number'}
           </Link>

@@ -34,7 +34,7 @@ export function MayBePaid({ invoice }: { invoice: InvoiceDetail }) {
             <th scope="row" className="border-t-heavy border-ink py-1.5 text-left font-cond text-[1.1875rem] font-bold">
               {state === 'paid' ? 'Left to pay' : 'To pay'}, {currency}
             </th>
-            <td className="num border-t-heavy border-ink py-1.5 text-right text-[1.4375rem] font-semibold">{amountText(left)}</td>
+            <td className="border-t-heavy border-ink py-1.5 text-right font-mono text-[1.4375rem] font-semibold whitespace-nowrap">{amountText(left)}</td>
           </tr>
         </tbody>
       </table>

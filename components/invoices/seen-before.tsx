@@ -9,6 +9,9 @@ import { invoiceName } from './invoice-words';
 
 type Why = InvoiceDetail['seenBefore'][number]['why'];
 
+/** Sums at a lot minimum repeat; the rest is a number. */
+const MOST_NAMED = 3;
+
 /** Whether this may be an invoice that was here already, said either way. */
 export function SeenBefore({ invoice }: { invoice: InvoiceDetail }) {
   const { number, processor, orderNumber, totalMinor, file } = invoice;
@@ -44,12 +47,13 @@ function Check({ met, found, others }: { met: string; found: string; others: Inv
       <span>
         <span className="sr-only">warns: </span>
         <strong>{found}</strong>:{' '}
-        {others.map((one, at) => (
+        {others.slice(0, MOST_NAMED).map((one, at) => (
           <span key={one.id}>
             {at > 0 && ', '}
             <Link href={`/invoices/${one.id}`}>{invoiceName(one)}</Link> for {one.batchNumber}
           </span>
         ))}
+        {others.length > MOST_NAMED && ` and ${others.length - MOST_NAMED} more`}
       </span>
     </li>
   );

@@ -1,3 +1,5 @@
+import { amountText } from '@/lib/money';
+
 /** A kind of thing as it is said: `sent_mail` is a "sent mail". */
 export const kindWords = (entity: string): string => entity.replaceAll('_', ' ');
 
@@ -34,12 +36,16 @@ export interface Change {
 export function changesBetween(before: Record<string, unknown> | null, after: Record<string, unknown> | null): Change[] {
   const names = [...new Set([...Object.keys(before ?? {}), ...Object.keys(after ?? {})])];
   return names
-    .map((name) => ({ field: fieldWords(name), before: valueWords(before?.[name]), after: valueWords(after?.[name]) }))
+    .map((name) => ({ field: fieldWords(name), before: wordsOf(name, before?.[name]), after: wordsOf(name, after?.[name]) }))
     .filter((change) => change.before !== change.after);
 }
 
+/** Sums are kept in minor units and read in whole ones. */
+const wordsOf = (name: string, value: unknown): string | null => (name.endsWith('Minor') && typeof value === 'number' ? amountText(value) : valueWords(value));
+
 const fieldWords = (name: string): string =>
   name
+    .replace(/Minor$/, '')
     .replaceAll(/([A-Z])/g, ' $1')
     .replaceAll('_', ' ')
     .toLowerCase();

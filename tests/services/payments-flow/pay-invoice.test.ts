@@ -276,7 +276,7 @@ describe('nothing happens twice', () => {
       attempt: 1,
       now: () => new Date(),
       atDoor: () => Promise.reject(new Error('not asked for')),
-      inShop: (shopId, work) => {
+      inShop: (_, work) => {
         transactions += 1;
         if (transactions > 1) return Promise.reject(new Error('killed'));
         return world.as(ALL, (ctx) => work({ ...ctx, actor: { kind: 'job', name: 'pay-invoice', roles: [] } }));
