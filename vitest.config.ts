@@ -35,9 +35,10 @@ export default defineConfig({
         test: {
           name: 'faults',
           include: ['tests/faults/**/*.test.ts'],
+          globalSetup: ['tests/services/global-setup.ts'],
           // Each file kills servers of its own; two at once would only measure the machine.
           fileParallelism: false,
-          testTimeout: 600_000,
+          testTimeout: 900_000,
           hookTimeout: 300_000,
         },
       },

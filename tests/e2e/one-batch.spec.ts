@@ -70,7 +70,7 @@ async function makePartAndLot(lead: Person, partNumber: string): Promise<string>
   await lead.type(page.getByLabel('Limit'), 'passed');
   await lead.press(page.getByRole('button', { name: 'Add the part' }));
   await lead.press(page.getByRole('link', { name: 'Add a lot of it' }));
-  await lead.type(page.getByLabel('Heat'), 'C40117');
+  await lead.type(page.getByLabel('Heat', { exact: true }), 'C40117');
   await lead.type(page.getByLabel('Pieces', { exact: true }), PIECES);
   await lead.press(page.getByRole('button', { name: 'Add the lot' }));
   await page.waitForURL(/\/lots\/[0-9a-f-]{36}/);

@@ -79,9 +79,9 @@ interface People {
 }
 
 export const test = base.extend<People>({
-  person: async ({ browser, baseURL }, use) => {
+  person: async ({ browser, baseURL }, give) => {
     const contexts: Awaited<ReturnType<typeof browser.newContext>>[] = [];
-    await use(async (name, width = 1440) => {
+    await give(async (name, width = 1440) => {
       const context = await browser.newContext({ ...(baseURL === undefined ? {} : { baseURL }), viewport: { width, height: width < 500 ? 844 : 900 }, hasTouch: width < 900 });
       contexts.push(context);
       return new Person(name, await context.newPage());
