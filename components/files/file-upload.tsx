@@ -34,7 +34,7 @@ export function FileUpload({ purpose, batchId, label, hint, multiple = false, ca
     <div className="min-w-0">
       {takes && <FileDrop label={label} hint={hint} error={error} multiple={multiple} camera={camera} accept={acceptedFiles(purpose)} onFiles={add} />}
       {uploads.length > 0 && (
-        <ul aria-label={typeof label === 'string' ? `${label}: files` : 'Files'} className="mt-2">
+        <ul aria-label="Files being sent" className="mt-2">
           {uploads.map((upload) => (
             <UploadRow
               key={upload.key}

@@ -10,6 +10,7 @@ import { Loading } from '@/components/ui/loading';
 import { showMessage } from '@/components/ui/message';
 import { PageHead } from '@/components/ui/page-head';
 import { Section } from '@/components/ui/section';
+import { Cell, Row, Table } from '@/components/ui/table';
 import type { OutputOf } from '@/lib/api/endpoint';
 import { checkLotImport, importLots, listLots } from '@/lib/lots/contract';
 import { IMPORT_COLUMNS, importTemplate, piecesIn, type RawRow } from '@/lib/lots/import-row';
@@ -47,14 +48,36 @@ export function ImportScreen() {
     <>
       <PageHead title="Import lots" sub="From a spreadsheet saved as CSV. You see every row first; nothing is imported until all are right." />
       <div className="grid grid-cols-[minmax(0,2fr)_minmax(0,1fr)] gap-9 max-md:grid-cols-1 max-md:gap-4">
-        <FileDrop label={preview ? 'Choose the file again, or another' : 'CSV file of lots'} accept=".csv,.tsv,.txt,text/csv" onFiles={(files) => void read(files)} error={fault} hint={`Columns: ${IMPORT_COLUMNS.map(({ head, must }) => (must ? head : `${head} (may be empty)`)).join(', ')}`} />
+        <FileDrop label={preview ? 'Choose the file again, or another' : 'CSV file of lots'} accept=".csv,.tsv,.txt,text/csv" onFiles={(files) => void read(files)} error={fault} hint="comma, semicolon or tab between the cells; at most 1,000 rows" />
         <div className="pt-[21px] max-md:pt-0">
           <Button onClick={saveTemplate}>Save an empty file to fill in</Button>
         </div>
       </div>
       {check.isPending && <Loading label="Looking through the file" />}
+      {!preview && !check.isPending && <ColumnsOfFile />}
       {preview && <PreviewOfImport key={preview.name} preview={preview} onChanged={(checked) => setPreview({ ...preview, checked })} />}
     </>
+  );
+}
+
+function ColumnsOfFile() {
+  return (
+    <Section title="What the file has" note="the first line names the columns, in any order" className="mt-6">
+      <Table label="Columns of the file" columns={[{ says: 'Column' }, { says: 'Example' }, { says: 'What it is' }]}>
+        {IMPORT_COLUMNS.map((column) => (
+          <Row key={column.key}>
+            <Cell strong>{column.head}</Cell>
+            <Cell code head="Example">
+              {column.example}
+            </Cell>
+            <Cell>
+              {column.says}
+              {!column.must && <span className="text-quiet"> May be empty or left out.</span>}
+            </Cell>
+          </Row>
+        ))}
+      </Table>
+    </Section>
   );
 }
 

@@ -14,7 +14,7 @@ import { spotWords } from './place-words';
 const COLUMNS = [{ says: 'When' }, { says: 'Who' }, { says: 'Pieces', right: true }, { says: 'From' }, { says: 'To' }, { says: 'Why' }];
 
 /** Every movement of the lot's pieces: what the picture above is the sum of. */
-export function Ledger({ lotId }: { lotId: string }) {
+export function Ledger({ lotId, made }: { lotId: string; made: number }) {
   const clock = useClock();
   const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listMovements, { lotId });
   const rows = data?.pages.flatMap((page) => page.rows) ?? [];
@@ -35,8 +35,8 @@ export function Ledger({ lotId }: { lotId: string }) {
               </Cell>
               <Cell head="From">{row.from === null ? <span className="text-quiet">made</span> : spotWords(row.from)}</Cell>
               <Cell head="To">{spotWords(row.to)}</Cell>
-              <Cell head="Why" className="[overflow-wrap:anywhere]">
-                <Why row={row} />
+              <Cell head="Why" className="break-words">
+                <Why row={row} made={made} />
               </Cell>
             </Row>
           ))}
@@ -53,12 +53,13 @@ export function Ledger({ lotId }: { lotId: string }) {
   );
 }
 
-function Why({ row }: { row: MovementRow }) {
+/** Serials only where not all pieces went: otherwise each row would repeat them all. */
+function Why({ row, made }: { row: MovementRow; made: number }) {
   return (
     <>
       {row.reason.replaceAll('_', ' ')}
       {row.note && <span className="text-quiet">, {row.note}</span>}
-      {row.serials.length > 0 && <span className="num block text-source text-quiet">{row.serials.join(', ')}</span>}
+      {row.serials.length > 0 && row.serials.length < made && <span className="num block text-source text-quiet">{row.serials.join(', ')}</span>}
     </>
   );
 }

@@ -36,7 +36,7 @@ export function LotScreen({ lotId }: { lotId: string }) {
             <WherePiecesAre lot={lot} />
             {lot.named.length > 0 && <NamedPieces lot={lot} />}
             <BatchesOfLot lot={lot} />
-            <Ledger lotId={lot.id} />
+            <Ledger lotId={lot.id} made={lot.made} />
           </>
         }
         side={

@@ -54,8 +54,10 @@ function LotForm({ part, onPick }: { part: PickedPart | null; onPick: (part: Pic
 
   const submit = form.handleSubmit(async (values) => {
     const input = LotInput.safeParse(inputOf(values, part));
-    if (!input.success) {
-      const wrong = new Map(input.error.issues.map(({ path, message }) => [String(path[0]), message]));
+    const uncounted = part !== null && !part.serialised && values.pieces.trim() === '';
+    if (!input.success || uncounted) {
+      const wrong = new Map((input.error?.issues ?? []).map(({ path, message }) => [String(path[0]), message]));
+      if (uncounted) wrong.set('pieces', 'Pieces are missing. Enter how many there are.');
       [...wrong].forEach(([field, message], at) => form.setError(field as keyof Values, { message }, { shouldFocus: at === 0 }));
       return;
     }

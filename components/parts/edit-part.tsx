@@ -19,7 +19,7 @@ export function EditPart({ partId }: { partId: string }) {
   const fixed = part.lotCount > 0 ? `on the papers of ${part.lotCount === 1 ? '1 lot' : `${part.lotCount} lots`}; revise the part` : undefined;
   return (
     <>
-      <PageHead title={`${part.number} rev ${part.revision}`} sub={`Correct ${part.name}`} />
+      <PageHead title={`Correct ${part.number} rev ${part.revision}`} sub={part.name} />
       <PartForm
         values={valuesOf(part)}
         frozen={{ number: fixed, revision: fixed, serialised: fixed && (part.serialised ? 'Each piece has its own serial.' : 'Its pieces have no serials.') }}

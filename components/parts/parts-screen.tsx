@@ -78,7 +78,7 @@ function PartLine({ row }: { row: PartRow }) {
         <span className="whitespace-nowrap text-quiet">rev {row.revision}</span> <span className="font-cond">{row.name}</span>
         {row.supersededAt !== null && <span className="text-quiet">, superseded</span>}
       </Cell>
-      <Cell head="Material">{materialWords(row)}</Cell>
+      <Cell head="Material" className="whitespace-nowrap">{materialWords(row)}</Cell>
       <Cell figure head="Thickness" className="whitespace-nowrap">
         {row.thickness}
       </Cell>

@@ -21,6 +21,7 @@ export function FileDrop({ label, onFiles, hint, error, accept, multiple, camera
   const id = useId();
   const [over, setOver] = useState(false);
   const depth = useRef(0);
+  const takesPhotos = accept === undefined || accept.includes('image');
 
   const take = (files: FileList | null) => {
     const list = [...(files ?? [])];
@@ -70,7 +71,8 @@ export function FileDrop({ label, onFiles, hint, error, accept, multiple, camera
           className="absolute inset-0 cursor-pointer opacity-0"
         />
         <span aria-hidden="true">
-          Drop {multiple ? 'files' : 'a file'}, take a photo, or <span className="lw-word-button text-ink">choose</span>
+          Drop {multiple ? 'files' : 'a file'}
+          {takesPhotos && ', take a photo'}, or <span className="lw-word-button text-ink">choose</span>
         </span>
       </div>
       {error ? (

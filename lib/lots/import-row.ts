@@ -2,14 +2,14 @@ import { z } from 'zod';
 
 /** The columns of an import, by the name in the file's first line. `must` may not be left out. */
 export const IMPORT_COLUMNS = [
-  { key: 'part', head: 'part', must: true, example: 'FL-4418-03' },
-  { key: 'revision', head: 'revision', must: false, example: 'C' },
-  { key: 'heat', head: 'heat', must: true, example: '47-2210' },
-  { key: 'pieces', head: 'pieces', must: true, example: '14' },
-  { key: 'serials', head: 'serials', must: false, example: '' },
-  { key: 'lot', head: 'lot', must: false, example: '' },
-  { key: 'madeOn', head: 'made on', must: false, example: '2026-04-16' },
-  { key: 'note', head: 'note', must: false, example: '' },
+  { key: 'part', head: 'part', must: true, example: 'FL-4418-03', says: 'Its drawing number, as it is here.' },
+  { key: 'revision', head: 'revision', must: false, example: 'C', says: 'Empty is the current one.' },
+  { key: 'heat', head: 'heat', must: true, example: '47-2210', says: "The mill's heat or melt number." },
+  { key: 'pieces', head: 'pieces', must: true, example: '14', says: 'How many were made; a whole number without a comma.' },
+  { key: 'serials', head: 'serials', must: false, example: '', says: 'Where each piece has its own: divided by semicolons, as S-1; S-2.' },
+  { key: 'lot', head: 'lot', must: false, example: '', says: "A number of your own. Empty is the shop's next." },
+  { key: 'madeOn', head: 'made on', must: false, example: '2026-04-16', says: 'The day, year first. Empty is today.' },
+  { key: 'note', head: 'note', must: false, example: '', says: 'For the shop.' },
 ] as const;
 export type ImportKey = (typeof IMPORT_COLUMNS)[number]['key'];
 
