@@ -3,11 +3,12 @@ import { useState, type KeyboardEvent } from 'react';
 
 import { HoldForm } from '@/components/nonconformances/hold-form';
 import { useMay } from '@/components/session/use-me';
-import { Button, ButtonLink } from '@/components/ui/button';
+import { Button } from '@/components/ui/button';
 import { TextField } from '@/components/ui/field';
 import type { ProvedRequirement } from '@/lib/certificates/contract';
 import type { Verdict } from '@/lib/certificates/verdict';
 
+import { AskForm } from './ask-form';
 import { limitWords } from './certificate-words';
 import { OverrideDialog } from './override-dialog';
 import type { Proving } from './use-proving';
@@ -23,7 +24,9 @@ const SOURCES = { drawing: 'drawing', specification: 'specification', shop: 'sho
 /** A row opened in place: what it states, the verdict, and the ways out where it does not hold. */
 export function RequirementOpen({ requirement, proving, canEdit }: RequirementOpenProps) {
   const mayHold = useMay('nonconformance.raise');
-  const [holding, setHolding] = useState(false);
+  const mayAsk = useMay('batch.message');
+  const [doing, setDoing] = useState<'hold' | 'ask' | null>(null);
+  const done = () => setDoing(null);
   const { decision } = requirement;
   const { certificate, batch } = proving.data;
   const processor = batch.processor.split(' ')[0] ?? batch.processor;
@@ -41,22 +44,23 @@ export function RequirementOpen({ requirement, proving, canEdit }: RequirementOp
             )}
           </p>
           {canEdit && <Judge requirement={requirement} proving={proving} />}
-          {!holding && (
+          {doing === null && (
             <div className="flex flex-wrap gap-2">
               {canEdit && decision && decision.verdict !== 'meets' && <OverrideDialog requirement={requirement} proving={proving} />}
               {mayHold && (
-                <Button size="small" look="stop" shortcut="H" onClick={() => setHolding(true)}>
+                <Button size="small" look="stop" shortcut="H" onClick={() => setDoing('hold')}>
                   Hold pieces
                 </Button>
               )}
-              {decision && decision.verdict !== 'meets' && (
-                <ButtonLink size="small" shortcut="A" href={`/batches/${batch.id}?ask=${encodeURIComponent(questionOf(requirement))}#messages`}>
+              {mayAsk && decision && decision.verdict !== 'meets' && (
+                <Button size="small" shortcut="A" onClick={() => setDoing('ask')}>
                   Ask {processor} to correct
-                </ButtonLink>
+                </Button>
               )}
             </div>
           )}
-          {holding && (
+          {doing === 'ask' && <AskForm batchId={batch.id} processor={processor} lineId={requirement.lineId} body={questionOf(requirement, certificate.number)} onDone={done} />}
+          {doing === 'hold' && (
             <HoldForm
               batchId={batch.id}
               onlyLineId={requirement.lineId}
@@ -64,7 +68,7 @@ export function RequirementOpen({ requirement, proving, canEdit }: RequirementOp
               certificateId={certificate.id}
               kind={decision?.verdict === 'does_not_meet' ? 'requirement' : 'papers'}
               what={whatIsWrong(requirement)}
-              onDone={() => setHolding(false)}
+              onDone={done}
             />
           )}
         </div>
@@ -132,4 +136,4 @@ function whatIsWrong(requirement: ProvedRequirement): string {
   return `${characteristic}: ordered ${ordered || 'to be stated'}, the certificate ${says}`;
 }
 
-const questionOf = (requirement: ProvedRequirement): string => `${whatIsWrong(requirement)}. Send a corrected certificate.`;
+const questionOf = (requirement: ProvedRequirement, number: string | null): string => `${number === null ? '' : `Certificate ${number}. `}${whatIsWrong(requirement)}. Send a corrected certificate.`;

@@ -1,6 +1,6 @@
 'use client';
 import { useRouter } from 'next/navigation';
-import { useState, type FormEvent } from 'react';
+import { useEffect, useRef, useState, type FormEvent } from 'react';
 
 import { useLazyRead } from '@/components/api/use-api';
 import { CameraScan } from '@/components/shell/camera-scan';
@@ -15,8 +15,12 @@ import { call } from '@/lib/api/client';
 import { listBatches, type BatchRow } from '@/lib/batches/contract';
 import { findForReceiving } from '@/lib/receipts/contract';
 
-/** Which batch is on the bench: by its code, its number, or from what is out. */
-export function ScanBatch() {
+/**
+ * Which batch is on the bench: by its code, its number, or from what is out.
+ *
+ * @param asked what a scanner typed and sent before this page was awake.
+ */
+export function ScanBatch({ asked = '' }: { asked?: string }) {
   const router = useRouter();
   const [camera, setCamera] = useState(false);
   const [refused, setRefused] = useState<string>();
@@ -31,6 +35,10 @@ export function ScanBatch() {
       setRefused(error instanceof Error ? error.message : 'Not found.');
     }
   };
+  const openAsked = useRef(() => open(asked));
+  useEffect(() => {
+    if (asked !== '') void openAsked.current();
+  }, [asked]);
   const submit = async (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault();
     const text = new FormData(event.currentTarget).get('number');
@@ -41,7 +49,7 @@ export function ScanBatch() {
     <>
       <PageHead title="Count in" sub="Scan the code of the traveller, or type the number of the batch or the order." />
       <form noValidate onSubmit={submit} className="flex max-w-prose flex-wrap items-start gap-2.5">
-        <TextField className="min-w-56 flex-1" label="Number" name="number" mono autoFocus autoComplete="off" autoCapitalize="characters" spellCheck={false} error={refused} onChange={() => setRefused(undefined)} />
+        <TextField className="min-w-56 flex-1" label="Number" name="number" defaultValue={asked} mono autoFocus autoComplete="off" autoCapitalize="characters" spellCheck={false} error={refused} onChange={() => setRefused(undefined)} />
         <span className="flex gap-2 pt-[21px]">
           <Button look="primary" type="submit">
             Open
