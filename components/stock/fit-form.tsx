@@ -20,14 +20,17 @@ interface FitFormProps {
   lotNumber: string;
   locationId: string;
   spot: StockSpot;
+  /** On the page of an assembly: no other is offered. */
+  onlyTo?: string;
 }
 
 const REFRESHES = [listStock, getStockSpot, listLocations, listAssemblies, getAssembly];
 
 /** Issues pieces to an assembly that needs them, the one that needs them first unless another is chosen. */
-export function FitForm({ lotId, lotNumber, locationId, spot }: FitFormProps) {
+export function FitForm({ lotId, lotNumber, locationId, spot, onlyTo }: FitFormProps) {
   const clock = useClock();
-  const first = spot.needs[0];
+  const needs = onlyTo === undefined ? spot.needs : spot.needs.filter((one) => one.assemblyId === onlyTo);
+  const first = needs[0];
   const most = Math.min(spot.pieces, first?.open ?? 0);
   const form = useForm<SpotFormIn, unknown, SpotFormOut>({
     resolver: zodResolver(SpotForm),
@@ -36,7 +39,7 @@ export function FitForm({ lotId, lotNumber, locationId, spot }: FitFormProps) {
   const fit = useWrite(fitPieces, { refreshes: REFRESHES });
   const takeOut = useWrite(takeOutPieces, { refreshes: REFRESHES });
   const typed = useWatch({ control: form.control });
-  const need = spot.needs.find((one) => one.assemblyId === typed.to) ?? first;
+  const need = needs.find((one) => one.assemblyId === typed.to) ?? first;
   const count = typedCount({ isNamed: typed.isNamed ?? false, pieces: typed.pieces ?? '', names: typed.names ?? [] });
   const { errors } = form.formState;
 
@@ -53,18 +56,18 @@ export function FitForm({ lotId, lotNumber, locationId, spot }: FitFormProps) {
     if (fields.length === 0) form.setError('root', { type: 'server', message: problem.title });
   };
 
-  if (!first) return <p className="text-quiet">No open assembly needs more of this part.</p>;
+  if (!first) return <p className="text-quiet">{onlyTo === undefined ? 'No open assembly needs more of this part.' : 'No more of it is needed here.'}</p>;
   return (
     <form noValidate onSubmit={submit} aria-label={`Fit pieces of ${lotNumber}`}>
       <div className="flex flex-wrap items-start gap-x-4 gap-y-3">
         <SpotPieces form={form} label="Pieces to fit" max={Math.min(spot.pieces, need?.open ?? spot.pieces)} named={spot.named} />
-        <SelectField
+        {onlyTo === undefined && <SelectField
           label="To the assembly"
           className="min-w-56 flex-1"
           error={errors.to?.message}
-          options={spot.needs.map(({ assemblyId, name, open, neededOn }) => ({ value: assemblyId, says: `${name}, needs ${open} more${neededOn === null ? '' : `, ${shortDayWords(neededOn, clock)}`}` }))}
+          options={needs.map(({ assemblyId, name, open, neededOn }) => ({ value: assemblyId, says: `${name}, needs ${open} more${neededOn === null ? '' : `, ${shortDayWords(neededOn, clock)}`}` }))}
           {...form.register('to')}
-        />
+        />}
       </div>
       <div className="pt-3">
         <Button type="submit" busy={fit.isPending} busyLabel="Fitting">

@@ -58,7 +58,7 @@ export function StockLine({ row, span }: StockLineProps) {
       </Row>
       {open && (
         <tr role="row" id={openId}>
-          <td role="cell" colSpan={span} className="bg-bench">
+          <td role="cell" colSpan={span}>
             <OpenSpot row={row} mayFit={mayFit} mayMove={mayMove} />
           </td>
         </tr>

@@ -67,7 +67,7 @@ export const AssemblyNeedRow = z.object({
   /** In the yard, not on any batch, by the outside step they wait for. */
   waiting: z.array(z.object({ process: z.enum(PROCESSES), pieces: z.int() })),
   /** Which lots went into it. */
-  fittedLots: z.array(z.object({ lotId: Id, lotNumber: z.string(), pieces: z.int(), serials: z.array(z.string()) })),
+  fittedLots: z.array(z.object({ lotId: Id, lotNumber: z.string(), pieces: z.int(), named: z.array(z.object({ id: Id, serial: z.string() })) })),
 });
 export type AssemblyNeedRow = z.output<typeof AssemblyNeedRow>;
 

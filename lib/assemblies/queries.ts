@@ -78,7 +78,7 @@ async function readNeedRows(ctx: Ctx, assemblyId: string): Promise<AssemblyNeedR
         select s.process, min(s.seq) as seq, sum(b.pieces)::int as pieces from balances b join route_steps s on s.id = b.holder_id join parts p on p.id = s.part_id
         where b.place = 'making' and b.pieces > 0 and p.number = n.part_number group by s.process) w), '[]') as waiting,
       coalesce((select jsonb_agg(jsonb_build_object('lotId', o.id, 'lotNumber', o.number, 'pieces', b.pieces,
-          'serials', coalesce((select jsonb_agg(c.serial order by c.serial) from pieces c where c.lot_id = o.id and c.place = 'fitted' and c.holder_id = n.assembly_id), '[]')) order by o.number)
+          'named', coalesce((select jsonb_agg(jsonb_build_object('id', c.id, 'serial', c.serial) order by c.serial) from pieces c where c.lot_id = o.id and c.place = 'fitted' and c.holder_id = n.assembly_id), '[]')) order by o.number)
         from balances b join lots o on o.id = b.lot_id join parts p on p.id = o.part_id
         where b.place = 'fitted' and b.pieces > 0 and b.holder_id = n.assembly_id and p.number = n.part_number), '[]') as "fittedLots",
       coalesce((select jsonb_agg(jsonb_build_object('lotId', o.id, 'lotNumber', o.number, 'locationId', l.id, 'location', l.name, 'pieces', b.pieces) order by o.number, l.name)
