@@ -2,7 +2,6 @@ import { dehydrate, HydrationBoundary, QueryClient } from '@tanstack/react-query
 import { headers } from 'next/headers';
 import { notFound, redirect } from 'next/navigation';
 import { cache, type ReactNode } from 'react';
-import { ZodError } from 'zod';
 
 import { withTenant } from '@/db/client';
 import { replica } from '@/db/pools';
@@ -59,8 +58,7 @@ async function readAll(queries: readonly Asked[]): Promise<{ key: readonly unkno
       return results;
     });
   } catch (error) {
-    // An address with an id that is none, and a filter nobody offers, lead nowhere either.
-    if (error instanceof ZodError || (error instanceof AppError && ['not_found', 'not_allowed'].includes(error.code))) notFound();
+    if (error instanceof AppError && ['not_found', 'not_allowed'].includes(error.code)) notFound();
     throw error;
   }
 }
