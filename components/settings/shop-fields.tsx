@@ -22,9 +22,8 @@ export interface ShopForm {
 
 type Form = UseFormReturn<ShopForm>;
 
-const zones = (current: string): string[] => [...new Set([current, 'UTC', ...Intl.supportedValuesOf('timeZone')])];
-
-export function ShopFields({ form }: { form: Form }) {
+/** @param zones the server's own list: the browser's may know other names, and the server has the last word. */
+export function ShopFields({ form, zones }: { form: Form; zones: readonly string[] }) {
   const { errors, defaultValues } = form.formState;
   return (
     <div className="grid gap-x-6 gap-y-3 pt-1 md:grid-cols-2">
@@ -32,7 +31,7 @@ export function ShopFields({ form }: { form: Form }) {
       <TextField label="Telephone" type="tel" hint="whom a processor rings" error={errors.phone?.message} {...form.register('phone')} />
       <TextArea label="Address" rows={3} hint="line by line, as on a letter" error={errors.address?.message} {...form.register('address')} />
       <div className="flex flex-col gap-3">
-        <SelectField label="Time zone" options={zones(defaultValues?.zone ?? 'UTC').map((zone) => ({ value: zone, says: zone.replaceAll('_', ' ') }))} error={errors.zone?.message} {...form.register('zone')} />
+        <SelectField label="Time zone" options={[...new Set([defaultValues?.zone ?? 'UTC', ...zones])].map((zone) => ({ value: zone, says: zone.replaceAll('_', ' ') }))} error={errors.zone?.message} {...form.register('zone')} />
         <div className="grid grid-cols-2 gap-3">
           <SelectField label="Currency" hint="of new batches" options={CURRENCIES.map((currency) => ({ value: currency, says: currency }))} error={errors.currency?.message} {...form.register('currency')} />
           <TextField label="Order numbers begin with" mono hint="as TS in TS-1187" error={errors.orderPrefix?.message} {...form.register('orderPrefix')} />

@@ -1,5 +1,4 @@
 'use client';
-import type { ReactNode } from 'react';
 import { useForm } from 'react-hook-form';
 import { useRouter } from 'next/navigation';
 
@@ -17,23 +16,21 @@ import { getMe } from '@/lib/session/contract';
 
 import { PolicyFields, ShopFields, type ShopForm } from './shop-fields';
 
-/** The shop and its policies. `payingMethod` is the section of the saved method that invoices are paid with. */
-export function ShopScreen({ payingMethod }: { payingMethod?: ReactNode }) {
+export function ShopScreen({ zones }: { zones: readonly string[] }) {
   const { data: shop } = useRead(getShopSettings, {});
   return (
     <>
       <PageHead title="Shop and policies" sub="Batches, orders and invoices that exist keep what they were made under." />
       <div className="flex max-w-[52rem] flex-col gap-7">
         {/* A fresh form for a fresh version: what was typed into the older one is told about, not merged. */}
-        <SettingsForm key={shop.version} shop={shop} />
-        {payingMethod}
+        <SettingsForm key={shop.version} shop={shop} zones={zones} />
         <History entity="shop" id={shop.id} title="Changes to the shop" />
       </div>
     </>
   );
 }
 
-function SettingsForm({ shop }: { shop: ShopSettings }) {
+function SettingsForm({ shop, zones }: { shop: ShopSettings; zones: readonly string[] }) {
   const router = useRouter();
   const write = useWrite(updateShopSettings, { refreshes: [getShopSettings, getMe] });
   const form = useForm<ShopForm>({ defaultValues: typedOf(shop) });
@@ -49,7 +46,7 @@ function SettingsForm({ shop }: { shop: ShopSettings }) {
   return (
     <form noValidate onSubmit={(event) => void save(event)} className="flex flex-col gap-7">
       <Section title="Shop" note="as it stands on travellers, orders and mails">
-        <ShopFields form={form} />
+        <ShopFields form={form} zones={zones} />
       </Section>
       <Section title="Policies">
         <PolicyFields form={form} currency={shop.currency} />

@@ -9,7 +9,7 @@ export const metadata: Metadata = { title: 'Shop and policies' };
 export default function ShopSettingsPage() {
   return (
     <Prefetched queries={[ask(getShopSettingsEndpoint, {})]}>
-      <ShopScreen />
+      <ShopScreen zones={['UTC', ...Intl.supportedValuesOf('timeZone')]} />
     </Prefetched>
   );
 }
