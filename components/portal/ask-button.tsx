@@ -11,7 +11,7 @@ export function AskButton() {
     field?.focus({ preventScroll: true });
   };
   return (
-    <Button size="big" className="flex-none! basis-28" onClick={go}>
+    <Button size="big" className="flex-[0_0_7rem]!" onClick={go}>
       Ask
     </Button>
   );

@@ -3,11 +3,31 @@ import { LoadNumber } from '@/components/ui/frame-number';
 import { dayWords, type Clock } from '@/lib/day-words';
 import type { PortalBatch, PortalLine } from '@/lib/portal/contract';
 
-/** What is asked, line by line, and the papers that say it whole. */
-export function AskedLines({ batch, clock }: { batch: PortalBatch; clock: Clock }) {
+/** What is asked, line by line, and the papers that say it whole. Once it is acknowledged the page is about what comes next. */
+export function AskedLines({ batch, clock, folded }: { batch: PortalBatch; clock: Clock; folded: boolean }) {
+  if (!folded) {
+    return (
+      <div className="border-t-heavy border-ink pt-1.5 pb-3">
+        <Asked batch={batch} clock={clock} />
+      </div>
+    );
+  }
+  return (
+    <details className="border-t-heavy border-ink pt-1 pb-1">
+      <summary className="lw-word-button">
+        What is asked, {batch.lines.length} {batch.lines.length === 1 ? 'line' : 'lines'}, traveller
+      </summary>
+      <div className="pb-2">
+        <Asked batch={batch} clock={clock} />
+      </div>
+    </details>
+  );
+}
+
+function Asked({ batch, clock }: { batch: PortalBatch; clock: Clock }) {
   const cautions = [...new Set(batch.lines.flatMap((line) => line.note ?? []))];
   return (
-    <div className="border-t-heavy border-ink pt-1.5 pb-3">
+    <>
       <ul aria-label="Lines">
         {batch.lines.map((line) => (
           <AskedLine key={line.id} line={line} />
@@ -25,7 +45,7 @@ export function AskedLines({ batch, clock }: { batch: PortalBatch; clock: Clock 
       )}
       <ToProve batch={batch} />
       <Documents batch={batch} clock={clock} />
-    </div>
+    </>
   );
 }
 

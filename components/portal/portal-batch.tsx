@@ -29,7 +29,7 @@ export function PortalBatch({ batchId, now }: { batchId: string; now: string }) 
     <>
       <BatchTitle batch={batch} clock={clock} />
       {batch.cancelledAt !== null && <Cancelled batch={batch} clock={clock} />}
-      <AskedLines batch={batch} clock={clock} />
+      <AskedLines batch={batch} clock={clock} folded={!isFirst && batch.cancelledAt === null} />
       {batch.cancelledAt === null && (isFirst ? <FirstAnswer batch={batch} clock={clock} /> : <UnderWay batch={batch} clock={clock} />)}
       <PortalMessages batchId={batchId} clock={clock} />
     </>

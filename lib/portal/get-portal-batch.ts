@@ -116,7 +116,7 @@ const readDocuments = (ctx: Ctx, batchId: string) =>
     .select({ id: batchDocuments.id, kind: batchDocuments.kind, documentVersion: batchDocuments.documentVersion, statedAt: batchDocuments.statedAt, changes: batchDocuments.changes, fileId: batchDocuments.fileId })
     .from(batchDocuments)
     .where(eq(batchDocuments.batchId, batchId))
-    .orderBy(desc(batchDocuments.documentVersion), desc(batchDocuments.kind));
+    .orderBy(desc(batchDocuments.documentVersion), asc(batchDocuments.kind));
 
 const readPromises = (ctx: Ctx, batchId: string) =>
   ctx.tx
