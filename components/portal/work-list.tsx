@@ -13,7 +13,7 @@ import { Cell, GroupRow, Row, Table } from '@/components/ui/table';
 import { BatchTag } from '@/components/ui/tag';
 import { daysUntil, shortDayWords, type Clock } from '@/lib/day-words';
 import { ApiError, call } from '@/lib/api/client';
-import { FIRST_ROWS, listPortalBatches, type PortalRow } from '@/lib/portal/contract';
+import { listPortalBatches, type PortalRow } from '@/lib/portal/contract';
 
 import { openOf, workGroups } from './work-groups';
 
@@ -27,7 +27,7 @@ const COLUMNS = [{ says: 'Batch' }, { says: 'Shop' }, { says: 'Pieces', right: t
 
 /** All work of the processor, for all its shops, worst first. */
 export function WorkList({ shopId, show, now }: WorkListProps) {
-  const { data } = useRead(listPortalBatches, { limit: FIRST_ROWS, show });
+  const { data } = useRead(listPortalBatches, { show });
   const earlier = useEarlier(show, data.next);
   const all = [...data.rows, ...earlier.rows];
   const clock = { zone: data.zone, now: new Date(now) };
@@ -56,7 +56,7 @@ function useEarlier(show: WorkListProps['show'], first: string | null) {
   const load = async () => {
     if (next === null) return;
     try {
-      const page = await call(listPortalBatches, { show, limit: FIRST_ROWS, after: next });
+      const page = await call(listPortalBatches, { show, after: next });
       setLoaded({ rows: [...(loaded?.rows ?? []), ...page.rows], next: page.next });
       setFailed(null);
     } catch (error) {

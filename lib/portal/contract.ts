@@ -118,9 +118,6 @@ export const PortalRow = z.object({
 });
 export type PortalRow = z.output<typeof PortalRow>;
 
-/** Rows that the page brings along; more are asked for. */
-export const FIRST_ROWS = 200;
-
 export const listPortalBatches = declare({
   id: 'listPortalBatches',
   method: 'get',
@@ -128,7 +125,8 @@ export const listPortalBatches = declare({
   summary: 'The work of a processor for all its shops; open by default, newest first',
   side,
   permission: 'portal.read',
-  input: PageQuery.extend({ shopId: Id.optional(), show: z.enum(['open', 'finished']).default('open') }),
+  // A work list is read whole; hardly any processor has more than one page of it.
+  input: PageQuery.extend({ limit: z.coerce.number().int().min(1).max(200).default(200), shopId: Id.optional(), show: z.enum(['open', 'finished']).default('open') }),
   response: pageOf(PortalRow).extend({ zone: z.string(), processor: z.string() }),
 });
 

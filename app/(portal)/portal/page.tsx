@@ -2,7 +2,6 @@ import type { Metadata } from 'next';
 
 import { ask, Prefetched } from '@/app/_kit/prefetch';
 import { WorkList } from '@/components/portal/work-list';
-import { FIRST_ROWS } from '@/lib/portal/contract';
 import { listPortalBatchesEndpoint } from '@/lib/portal/endpoints';
 
 import { PortalFrame } from './portal-frame';
@@ -18,7 +17,7 @@ export default async function WorkPage({ searchParams }: WorkPageProps) {
   const show = wanted === 'finished' ? ('finished' as const) : ('open' as const);
   return (
     <PortalFrame at={typeof at === 'string' ? at : undefined}>
-      <Prefetched queries={[ask(listPortalBatchesEndpoint, { limit: FIRST_ROWS, show })]}>
+      <Prefetched queries={[ask(listPortalBatchesEndpoint, { show })]}>
         <WorkList key={show} shopId={typeof shop === 'string' ? shop : undefined} show={show} now={new Date().toISOString()} />
       </Prefetched>
     </PortalFrame>
