@@ -16,13 +16,12 @@ export const getDossier = declare({
   id: 'getDossier',
   method: 'get',
   path: '/lots/{lotId}/dossier',
-  summary: 'All the evidence of a lot, the dossiers made of it, and the links given out',
+  summary: 'All the evidence of a lot, and the links given out to it',
   side: 'shop',
   permission: 'dossier.read',
   input: z.object({ lotId: Id }),
   response: z.object({
     evidence: Evidence,
-    made: z.array(DossierMade),
     links: z.array(z.object({ id: Id, forWhom: z.string(), expiresAt: Moment, withdrawnAt: Moment.nullable(), createdBy: z.string(), createdAt: Moment })),
   }),
 });

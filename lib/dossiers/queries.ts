@@ -21,7 +21,7 @@ export async function getDossier(ctx: Ctx, { lotId }: { lotId: string }) {
     .from(dossierLinks)
     .where(eq(dossierLinks.lotId, lotId))
     .orderBy(desc(dossierLinks.id));
-  return { evidence: withoutKeys(await readDossier(ctx, lotId)), made: await readMade(ctx, lotId), links };
+  return { evidence: withoutKeys(await readDossier(ctx, lotId)), links };
 }
 
 export async function listMadeDossiers(ctx: Ctx, { lotId }: { lotId: string }) {
