@@ -11,6 +11,7 @@ import { checkPart } from './check-part';
 import type { PartInput } from './contract';
 import { partColumns } from './part-columns';
 import { saveRoute } from './save-route';
+import { stepWords } from './step-words';
 
 /** Adds the first revision of a part that the shop is to make. */
 export async function createPart(ctx: Ctx, input: PartInput) {
@@ -24,6 +25,6 @@ export async function createPart(ctx: Ctx, input: PartInput) {
   const id = newId();
   await ctx.tx.insert(parts).values({ id, shopId: shopOf(ctx), ...partColumns(input), createdAt: ctx.now });
   await saveRoute(ctx, id, input.route);
-  await recordAudit(ctx, { action: 'part.create', entity: 'part', entityId: id, after: input });
+  await recordAudit(ctx, { action: 'part.create', entity: 'part', entityId: id, after: { ...input, route: input.route.map(stepWords) } });
   return { id, version: 1 };
 }

@@ -11,6 +11,7 @@ import { checkPart } from './check-part';
 import type { PartInput } from './contract';
 import { partColumns } from './part-columns';
 import { saveRoute } from './save-route';
+import { stepWords } from './step-words';
 
 type EditPartInput = PartInput & { partId: string; version: number };
 
@@ -30,7 +31,7 @@ export async function editPart(ctx: Ctx, { partId, version, ...input }: EditPart
   await saveRoute(ctx, partId, input.route);
 
   const now = await readPart(ctx, partId);
-  await recordAudit(ctx, { action: 'part.edit', entity: 'part', entityId: partId, ...changes({ ...before.part, route: before.route }, { ...now.part, route: now.route }) });
+  await recordAudit(ctx, { action: 'part.edit', entity: 'part', entityId: partId, ...changes({ ...before.part, route: before.route.map(stepWords) }, { ...now.part, route: now.route.map(stepWords) }) });
   return { id: partId, version: after.version };
 }
 

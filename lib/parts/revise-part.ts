@@ -11,6 +11,7 @@ import { checkPart } from './check-part';
 import type { PartInput } from './contract';
 import { partColumns } from './part-columns';
 import { saveRoute } from './save-route';
+import { stepWords } from './step-words';
 
 /** Adds the next revision. The one before is superseded; lots made from it stay with it. */
 export async function revisePart(ctx: Ctx, { partId, ...given }: PartInput & { partId: string }) {
@@ -33,6 +34,6 @@ export async function revisePart(ctx: Ctx, { partId, ...given }: PartInput & { p
   // New steps of its own: the old ones have lots waiting for them.
   await saveRoute(ctx, id, input.route.map((step) => ({ ...step, id: undefined })));
   await recordAudit(ctx, { action: 'part.supersede', entity: 'part', entityId: partId, after: { supersededBy: input.revision } });
-  await recordAudit(ctx, { action: 'part.revise', entity: 'part', entityId: id, before: { revision: old.revision }, after: input });
+  await recordAudit(ctx, { action: 'part.revise', entity: 'part', entityId: id, before: { revision: old.revision }, after: { ...input, route: input.route.map(stepWords) } });
   return { id, version: 1 };
 }
