@@ -1,9 +1,13 @@
 'use client';
+import { useState } from 'react';
+
 import { useRead } from '@/components/api/use-api';
 import { History } from '@/components/audit/history';
 import { CertificatesSection } from '@/components/certificates/certificates-section';
+import { BatchMessages } from '@/components/messages/batch-messages';
 import { InvoicesSection } from '@/components/invoices/invoices-section';
 import { NonconformancesSection } from '@/components/nonconformances/nonconformances-section';
+import { useMay } from '@/components/session/use-me';
 import { ReceiptsSection } from '@/components/receipts/receipts-section';
 import { ReleaseSection } from '@/components/stock/release-section';
 import { MainAndSide } from '@/components/ui/section';
@@ -12,6 +16,7 @@ import { getBatch } from '@/lib/batches/contract';
 import { BatchHead, HowItStands } from './batch-head';
 import { ChecksSection } from './checks-section';
 import { LinesSection } from './lines-section';
+import { LinkSection } from './link-section';
 import { PriceSection } from './price-section';
 import { RequirementsSection } from './requirements-section';
 import { RideAlongSection } from './ride-along-section';
@@ -54,12 +59,15 @@ function Building({ batchId, isOpen }: { batchId: string; isOpen: boolean }) {
 }
 
 function Sent({ batchId }: { batchId: string }) {
+  const mayWrite = useMay('batch.message');
+  const [now] = useState(() => new Date().toISOString());
   return (
     <MainAndSide
       main={
         <>
           <HowItStands batchId={batchId} />
           <LinesSection batchId={batchId} />
+          <BatchMessages batchId={batchId} now={now} mayWrite={mayWrite} />
           <ReceiptsSection batchId={batchId} />
           <CertificatesSection batchId={batchId} dispatched />
           <NonconformancesSection batchId={batchId} dispatched />
@@ -72,6 +80,7 @@ function Sent({ batchId }: { batchId: string }) {
       side={
         <>
           <TravellerSection batchId={batchId} />
+          <LinkSection batchId={batchId} />
           <PriceSection batchId={batchId} />
         </>
       }

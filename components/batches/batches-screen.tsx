@@ -87,7 +87,8 @@ function leftWords(row: BatchRow, clock: Clock, day: (at: string) => string): st
   if (row.dispatchedAt) return day(row.dispatchedAt);
   if (row.stage === 'cancelled') return '';
   if (row.putAsideAt) return 'put aside';
-  return row.leavesOn ? `leaves ${shortDayWords(row.leavesOn, clock)}` : '';
+  if (!row.leavesOn) return '';
+  return `${row.leavesOn < calendarDay(clock.now, clock.zone) ? 'should have left' : 'leaves'} ${shortDayWords(row.leavesOn, clock)}`;
 }
 
 function backWords(row: BatchRow, clock: Clock, day: (at: string) => string): string {

@@ -2,7 +2,7 @@
 import Link from 'next/link';
 
 import { useMe } from '@/components/session/use-me';
-import { NumberInput } from '@/components/ui/field';
+import { fieldAttributes, FieldError } from '@/components/ui/field';
 import { Cell, Row, Table } from '@/components/ui/table';
 import type { WaitingLot } from '@/lib/batches/waiting-contract';
 
@@ -52,8 +52,9 @@ export function LotChoice({ rows, typed, wrong, onType }: LotChoiceProps) {
               {row.pieces.toLocaleString('en-US')}
             </Cell>
             <Cell right head="Pieces">
-              <span className="inline-block w-24 text-left">
-                <NumberInput label={<span className="sr-only">{`Pieces of ${row.lotNumber}`}</span>} inputMode="numeric" value={text} error={wrong[row.lotId]} onChange={(event) => onType(row.lotId, event.currentTarget.value)} />
+              <span className="inline-block w-32 text-left">
+                <input className="lw-input lw-input-number" inputMode="numeric" autoComplete="off" aria-label={`Pieces of ${row.lotNumber}`} value={text} {...fieldAttributes(row.lotId, { error: wrong[row.lotId] })} onChange={(event) => onType(row.lotId, event.currentTarget.value)} />
+                {wrong[row.lotId] && <FieldError id={`${row.lotId}-error`} says={wrong[row.lotId] ?? ''} />}
               </span>
             </Cell>
           </Row>

@@ -14,11 +14,11 @@ export function TravellerSheet({ says, small = false }: { says: TravellerSays; s
     <div className={`lw-sheet border border-rule bg-white text-[#1e2326] ${small ? 'p-3 text-[9px] leading-3' : 'mx-auto max-w-[816px] p-6 text-row md:p-9'}`}>
       <div className="flex items-center border-heavy border-current px-3 py-1">
         <span className={`rounded-full border-heavy border-current ${small ? 'size-2.5' : 'size-6'}`} />
-        <strong className={`pl-3 font-mono ${small ? 'text-[15px]' : 'text-[2.2rem] leading-10'}`}>{says.number}</strong>
+        <span className={`pl-3 font-mono font-semibold ${small ? 'text-[15px]' : 'text-[2.2rem] leading-10'}`}>{says.number}</span>
         <span className={`ml-auto font-cond ${small ? 'text-[10px]' : 'text-word'}`}>{`Traveller, ${version}`}</span>
       </div>
       <p className={small ? 'mt-1.5' : 'mt-4'}>
-        <strong>{says.processor.name}</strong>, from {says.shop.name}. Order <span className="num">{says.orderNumber}</span>.{says.wantedBackOn && ` Wanted back ${day(says.wantedBackOn)}.`}
+        <span className="font-semibold">{says.processor.name}</span>, from {says.shop.name}. Order <span className="font-mono">{says.orderNumber}</span>.{says.wantedBackOn && ` Wanted back ${day(says.wantedBackOn)}.`}
         <br />
         {PROCESS_WORDS[says.process]}, {says.specification}. {pieces.toLocaleString('en-US')} pieces.
       </p>
@@ -77,7 +77,7 @@ function SheetList({ title, items, small }: { title: string; items: readonly str
   if (small) {
     return (
       <p>
-        <strong>{title}:</strong> {items.join('; ')}
+        <span className="font-semibold">{title}:</span> {items.map((item) => (item.endsWith('.') ? item : `${item}.`)).join(' ')}
       </p>
     );
   }

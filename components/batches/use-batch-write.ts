@@ -1,5 +1,6 @@
 'use client';
 import { useQueryClient } from '@tanstack/react-query';
+import { useRef } from 'react';
 
 import { useWrite } from '@/components/api/use-api';
 import { showMessage } from '@/components/ui/message';
@@ -18,8 +19,12 @@ const SHOWN = [getBatch, getBatchLines, getBatchChecks, getTraveller, listBatchD
 export function useBatchWrite<D extends Declaration>(declaration: D, onRefused?: (error: ApiError) => void) {
   const cache = useQueryClient();
   const write = useWrite(declaration, { refreshes: SHOWN });
-  /** @returns what was answered, or null where it was refused and told. */
+  // Two presses in one moment come before the button is drawn as busy.
+  const running = useRef(false);
+  /** @returns what was answered, or null where it was refused and told, or is being done already. */
   const run = async (input: InputOf<D>): Promise<OutputOf<D> | null> => {
+    if (running.current) return null;
+    running.current = true;
     try {
       return await write.mutateAsync(input);
     } catch (error) {
@@ -28,6 +33,8 @@ export function useBatchWrite<D extends Declaration>(declaration: D, onRefused?:
       else showMessage({ says: error.message, failed: true });
       if (error.problem.status === 409) await Promise.all([getBatch, getBatchLines, getBatchChecks].map((read) => cache.invalidateQueries({ queryKey: [read.id] })));
       return null;
+    } finally {
+      running.current = false;
     }
   };
   return { run, busy: write.isPending };
