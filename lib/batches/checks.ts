@@ -189,10 +189,17 @@ const hasDay: Check = {
 
 const hasPrice: Check = {
   met: 'the order states prices',
-  look: ({ batch, lines }) =>
-    batch.lotMinimumMinor > 0 || lines.some((line) => line.unitPriceMinor > 0)
-      ? []
-      : [{ code: 'no_price', level: 'warn', subject: '', sentence: 'The order states no price.', rest: 'An invoice will have nothing to be compared with.', waysOut: [{ way: 'set_prices', says: 'Set prices' }] }],
+  look({ batch, lines }) {
+    const waysOut: WayOut[] = [{ way: 'set_prices', says: 'Set prices' }];
+    const unpriced = lines.filter((line) => line.unitPriceMinor === 0);
+    if (unpriced.length === 0) return [];
+    if (unpriced.length < lines.length) {
+      const numbers = unpriced.map((line) => line.lineNo).join(', ');
+      return [{ code: 'line_without_price', level: 'note', subject: '', sentence: `${unpriced.length === 1 ? `Line ${numbers} has` : `Lines ${numbers} have`} no price.`, rest: 'The order counts them as nothing.', waysOut }];
+    }
+    if (batch.lotMinimumMinor > 0) return [];
+    return [{ code: 'no_price', level: 'warn', subject: '', sentence: 'The order states no price.', rest: 'An invoice will have nothing to be compared with.', waysOut }];
+  },
 };
 
 const isTakenUp: Check = {

@@ -47,11 +47,11 @@ export async function createBatch(ctx: Ctx, { processorId, lines, ...terms }: Cr
     .returning();
   if (!batch) throw new Error('a batch was not kept');
 
-  const packed = [];
+  const packed: string[] = [];
   for (const [at, line] of lines.entries()) {
     const waiting = at === 0 ? step : await readWaitingStep(ctx, line, `lines.${at}.lotId`);
     await packLine(ctx, batch, line, { lineNo: at + 1, step: waiting, prefix: `lines.${at}.` });
-    packed.push({ lot: waiting.lotNumber, pieces: line.pieces });
+    packed.push(`${waiting.lotNumber}, ${line.pieces} pc`);
   }
   await recordAudit(ctx, { action: 'batch.create', entity: 'batch', entityId: batch.id, after: { number: batch.number, orderNumber: batch.orderNumber, processorId, lines: packed } });
   await refreshStanding(ctx, batch.id);

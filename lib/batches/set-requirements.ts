@@ -7,6 +7,7 @@ import { authorize } from '@/lib/auth/authorize';
 import { shopOf, type Ctx } from '@/lib/auth/context';
 import { notFound } from '@/lib/errors';
 import { newId } from '@/lib/ids';
+import type { ToProve } from '@/lib/parts/to-prove';
 
 import { changeBuilding, refOf } from './change-building';
 import type { setRequirements as declaration } from './contract';
@@ -28,7 +29,7 @@ export async function setRequirements(ctx: Ctx, { batchId, version, lineId, requ
   if (asked.length > 0) {
     await ctx.tx.insert(requirements).values(asked.map((one, at) => ({ id: newId(), shopId: shopOf(ctx), batchId, lineId, seq: at + 1, ...one })));
   }
-  await recordAudit(ctx, { action: 'batch.set_requirements', entity: 'batch', entityId: batchId, before: { line: lineNo, requirements: before }, after: { line: lineNo, requirements: asked } });
+  await recordAudit(ctx, { action: 'batch.set_requirements', entity: 'batch', entityId: batchId, before: { line: lineNo, requirements: before.map(inWords) }, after: { line: lineNo, requirements: asked.map(inWords) } });
   await refreshStanding(ctx, batchId);
   return refOf(batch);
 }
@@ -38,3 +39,6 @@ async function lineNoOf(ctx: Ctx, batchId: string, lineId: string): Promise<numb
   if (!line) throw notFound('line');
   return line.lineNo;
 }
+
+/** One requirement as the audit trail tells it: `Hardness 63 to 83 HRB (AMS 2658)`. */
+const inWords = ({ characteristic, limit, unit, source, sourceText }: ToProve): string => `${[characteristic, limit, unit].filter(Boolean).join(' ')} (${sourceText || source})`;
