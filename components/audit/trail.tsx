@@ -90,6 +90,7 @@ function Thing({ entry }: { entry: AuditEntry }) {
 }
 
 const SHOWN_AT_ONCE = 3;
+const LETTERS_AT_ONCE = 240;
 
 function Changes({ entry }: { entry: AuditEntry }) {
   const changes = changesBetween(entry.before, entry.after);
@@ -98,7 +99,8 @@ function Changes({ entry }: { entry: AuditEntry }) {
       <span className="text-quiet">{field}</span> {before !== null && <s className="text-quiet">{before}</s>} {after ?? 'none'}
     </li>
   ));
-  if (lines.length <= SHOWN_AT_ONCE) return <ul className="max-w-[36rem]">{lines}</ul>;
+  const letters = changes.reduce((sum, { before, after }) => sum + (before?.length ?? 0) + (after?.length ?? 0), 0);
+  if (lines.length <= SHOWN_AT_ONCE && letters <= LETTERS_AT_ONCE) return <ul className="max-w-[36rem]">{lines}</ul>;
   return (
     <details className="max-w-[36rem]">
       <summary className="cursor-pointer">{changes.map((change) => change.field).join(', ')}</summary>

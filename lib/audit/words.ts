@@ -54,6 +54,14 @@ function valueWords(value: unknown): string | null {
   if (value === undefined || value === null || value === '') return null;
   if (typeof value === 'string') return value;
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
-  if (Array.isArray(value) && value.every((item) => typeof item !== 'object')) return value.join(', ');
-  return JSON.stringify(value);
+  if (Array.isArray(value)) return value.map((item) => valueWords(item) ?? 'none').join(value.some((item) => typeof item === 'object') ? '; ' : ', ');
+  return typeof value === 'object' ? objectWords(value) : JSON.stringify(value);
+}
+
+const ID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/;
+
+/** What is nothing or an id inside a thing tells a reader nothing; the entry itself keeps it. */
+function objectWords(value: object): string {
+  const told = Object.entries(value).filter(([, inner]) => !(typeof inner === 'string' && ID.test(inner)) && valueWords(inner) !== null);
+  return told.map(([name, inner]) => `${fieldWords(name)} ${valueWords(inner) ?? ''}`).join(', ');
 }
