@@ -72,10 +72,10 @@ const makeAssemblies = (play: StagePlay, lead: DemoPerson): Promise<void> =>
     }
   });
 
-/** Papers of long ago are made by the worker as all are, but their mails were read long ago. */
+/** Papers of long ago are made by the worker as all are, but after what is dispatched today, and their mails were read long ago. */
 async function keepOldMailsBack(owner: pg.Pool, today: Date): Promise<void> {
   await owner.query(
-    `update pgboss.job set data = jsonb_set(data, '{mail}', '"none"') where name = 'render-documents'
+    `update pgboss.job set data = jsonb_set(data, '{mail}', '"none"'), priority = -1 where name = 'render-documents'
        and (data->>'batchId')::uuid in (select id from batches where dispatched_at < $1)`,
     [subDays(today, MAILS_OF_DAYS)],
   );
