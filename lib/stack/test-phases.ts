@@ -60,7 +60,7 @@ export const PHASES: readonly Phase[] = [
   { name: 'unit', needs: 'nothing', run: (env) => runVitest('unit', env) },
   { name: 'services', needs: 'database', run: (env) => runVitest('services', env) },
   { name: 'e2e', needs: 'stack', run: runPlaywright },
-  { name: 'faults', needs: 'stack', run: (env) => runVitest('faults', env) },
+  { name: 'faults', needs: 'database', run: (env) => runVitest('faults', env) },
 ];
 
 async function runVitest(project: string, env: Env): Promise<Tally> {
