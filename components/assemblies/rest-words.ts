@@ -39,12 +39,3 @@ export function stillToMake(need: Need): number {
   const underWay = need.batches.reduce((sum, wait) => sum + wait.pieces, 0) + need.waiting.reduce((sum, one) => sum + one.pieces, 0);
   return Math.max(0, need.pieces - readyOf(need) - underWay);
 }
-
-/** The whole of one need in a sentence: `38 of 41, 3 at Galena Thermal until Thu 16 Apr`. */
-export function needSentence(need: Need, clock: Clock): string {
-  const ready = readyOf(need);
-  if (ready >= need.pieces) return `all ${need.pieces}`;
-  const rest = [...need.batches.flatMap((wait) => waitWords(wait, clock)), ...yardWords(need)].map((one) => one.says);
-  const toMake = stillToMake(need);
-  return [`${ready} of ${need.pieces}`, ...rest, ...(toMake > 0 ? [`${toMake} more to make`] : [])].join(', ');
-}

@@ -1,6 +1,6 @@
 import type { GateLine } from '@/lib/stock/contract';
 
-export interface MissingWords {
+interface MissingWords {
   reason: GateLine['missing'][number]['reason'];
   level: 'stop' | 'warn' | 'note';
   sentence: string;

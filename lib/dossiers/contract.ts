@@ -72,8 +72,6 @@ export const withdrawDossierLink = declare({
 
 const Token = z.string().min(16).max(200);
 
-export const DOSSIER_LINK_STATES = ['open', 'ended', 'withdrawn', 'unknown'] as const;
-
 export const readDossierLink = declare({
   id: 'readDossierLink',
   method: 'get',
@@ -82,7 +80,7 @@ export const readDossierLink = declare({
   side: 'public',
   permission: 'public.use',
   input: z.object({ token: z.string().max(400) }),
-  response: z.object({ state: z.enum(DOSSIER_LINK_STATES), shop: z.string().nullable(), phone: z.string().nullable(), zone: z.string().nullable(), endedAt: Moment.nullable() }),
+  response: z.object({ state: z.enum(['open', 'ended', 'withdrawn', 'unknown']), shop: z.string().nullable(), phone: z.string().nullable(), zone: z.string().nullable(), endedAt: Moment.nullable() }),
 });
 export type DossierLinkFace = z.output<(typeof readDossierLink)['response']>;
 

@@ -14,7 +14,5 @@ export const PLACES = [
 ] as const;
 export type Place = (typeof PLACES)[number];
 
-/** Places whose holder is a batch line. */
-export const LINE_PLACES = ['packed', 'transit_out', 'at_processor', 'transit_back', 'quarantine'] as const satisfies readonly Place[];
 /** Places in which a piece is out of the shop's hands. */
 export const AWAY_PLACES = ['transit_out', 'at_processor', 'transit_back'] as const satisfies readonly Place[];
