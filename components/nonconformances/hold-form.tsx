@@ -8,8 +8,9 @@ import { Failing } from '@/components/ui/failing';
 import { NumberInput, SelectField, TextArea } from '@/components/ui/field';
 import { Loading } from '@/components/ui/loading';
 import { showMessage } from '@/components/ui/message';
+import { getBatch, getBatchLines } from '@/lib/batches/contract';
 import { getCertificate, listCertificates } from '@/lib/certificates/contract';
-import { getNonconformance, getRaisable, listNonconformances, raiseNonconformance, type RaisableLine } from '@/lib/nonconformances/contract';
+import { getRaisable, listNonconformances, raiseNonconformance, type RaisableLine } from '@/lib/nonconformances/contract';
 import { RAISED_KINDS, type RaisedKind } from '@/lib/nonconformances/kind';
 
 const KINDS: Record<RaisedKind, string> = { requirement: 'A requirement is not met', papers: 'The papers do not prove it', damaged: 'Damaged' };
@@ -50,7 +51,7 @@ function Holding({ batchId, lines, kind: given, what: begun, requirementId = nul
   const [counts, setCounts] = useState<Record<string, string>>(() => Object.fromEntries(lines.map((line) => [line.lineId, line.serialised ? '0' : String(line.inQuarantine)])));
   const [ticked, setTicked] = useState<readonly string[]>([]);
   const [refused, setRefused] = useState('');
-  const write = useWrite(raiseNonconformance, { refreshes: [getCertificate, listCertificates, getRaisable, listNonconformances, getNonconformance] });
+  const write = useWrite(raiseNonconformance, { refreshes: [getCertificate, listCertificates, getRaisable, listNonconformances, getBatch, getBatchLines] });
 
   const countOf = (line: RaisableLine) => (line.serialised ? line.pieces.filter((piece) => ticked.includes(piece.id)).length : readCount(counts[line.lineId] ?? ''));
   const total = lines.reduce((sum, line) => sum + (countOf(line) ?? 0), 0);
