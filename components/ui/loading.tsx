@@ -15,8 +15,3 @@ export function Loading({ rows = 5, label = 'Loading' }: { rows?: number; label?
     </div>
   );
 }
-
-/** Old content stays while it is asked for again, and says how old it is. */
-export function AsOf({ time }: { time: string }) {
-  return <span className="text-second text-quiet">{time}</span>;
-}

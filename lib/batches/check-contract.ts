@@ -28,7 +28,6 @@ export const getBatchChecks = declare({
   input: z.object({ batchId: Id }),
   response: z.object({ findings: z.array(Finding), met: z.array(z.string()) }),
 });
-export type BatchChecks = z.output<(typeof getBatchChecks)['response']>;
 export type BatchFinding = z.output<typeof Finding>;
 
 /** Short reasons say nothing to whoever asks in five years. */

@@ -96,9 +96,3 @@ export async function makeSignedIn(owner: Db, organisation: { shopId: string } |
   await owner.insert(memberships).values({ userId, roles: [...roles], ...organisation, createdAt: TODAY });
   return { userId, email, cookie: await cookieFor({ kind: 'person', userId, sessionVersion: 1, ...organisation }) };
 }
-
-export const declarationOf = (id: string): Declaration => {
-  const found = ALL_ENDPOINTS.find(({ declaration }) => declaration.id === id);
-  if (!found) throw new Error(`no endpoint ${id}`);
-  return found.declaration;
-};
