@@ -4,7 +4,6 @@ import { beforeAll } from 'vitest';
 
 import type { Db } from '@/db/client';
 import { memberships, users } from '@/db/schema/people';
-import { ALL_ENDPOINTS } from '@/lib/api/all-endpoints';
 import { requestOf } from '@/lib/api/client';
 import type { Declaration, InputOf, OutputOf } from '@/lib/api/endpoint';
 import { Problem } from '@/lib/api/shapes';
