@@ -2,6 +2,7 @@ import { existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node
 import { join } from 'node:path';
 import { CannotStart } from '@/db/cannot-start';
 import { isAlive, startedAt } from '@/db/process-identity';
+import type { StackSettings } from './settings';
 
 interface Identity {
   readonly pid: number;
@@ -15,12 +16,13 @@ interface Claim {
 }
 
 /** One stack at a time in one folder. What a killed predecessor left running is ended first. */
-export async function claimRun(dataFolder: string, report: (line: string) => void): Promise<Claim> {
+export async function claimRun({ kind, dataFolder }: StackSettings, report: (line: string) => void): Promise<Claim> {
+  const what = kind === 'test' ? 'A test run is going on' : 'Lotwright already runs';
   const file = join(dataFolder, 'run.json');
   const [previous, ...parts] = readRecord(file);
   if (previous && isSame(previous)) {
     throw new CannotStart(
-      `Lotwright already runs from this folder, as process ${previous.pid}: stop that one first.`,
+      `${what} from this folder, as process ${previous.pid}: stop that one first.`,
     );
   }
   const leftOver = parts.filter(isSame);

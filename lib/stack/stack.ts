@@ -39,7 +39,7 @@ export class Stack {
 
   async claim(): Promise<void> {
     const { settings, report } = this.#options;
-    this.#claim = await claimRun(settings.dataFolder, report);
+    this.#claim = await claimRun(settings, report);
   }
 
   async openDatabase({ reset }: { reset: boolean }): Promise<void> {
