@@ -16,14 +16,15 @@ interface Claim {
 }
 
 /** One stack at a time in one folder. What a killed predecessor left running is ended first. */
-export async function claimRun({ kind, dataFolder }: StackSettings, report: (line: string) => void): Promise<Claim> {
+export async function claimRun(
+  { kind, dataFolder }: StackSettings,
+  report: (line: string) => void,
+): Promise<Claim> {
   const what = kind === 'test' ? 'A test run is going on' : 'Lotwright already runs';
   const file = join(dataFolder, 'run.json');
   const [previous, ...parts] = readRecord(file);
   if (previous && isSame(previous)) {
-    throw new CannotStart(
-      `${what} from this folder, as process ${previous.pid}: stop that one first.`,
-    );
+    throw new CannotStart(`${what} from this folder, as process ${previous.pid}: stop that one first.`);
   }
   const leftOver = parts.filter(isSame);
   if (leftOver.length > 0) {

@@ -42,7 +42,9 @@ export const PHASES: readonly Phase[] = [
     name: 'boundaries',
     needs: 'nothing',
     async run(env) {
-      const folders = ['app', 'components', 'emails', 'lib', 'db', 'fakes'].filter((folder) => existsSync(folder));
+      const folders = ['app', 'components', 'emails', 'lib', 'db', 'fakes'].filter((folder) =>
+        existsSync(folder),
+      );
       const cruiser = bin('dependency-cruiser', 'bin', 'dependency-cruise.mjs');
       const args = [cruiser, '--config', '.dependency-cruiser.cjs', ...folders];
       const { code, output } = await runToEnd(args, { env, output: 'keep' });
