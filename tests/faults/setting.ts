@@ -1,50 +1,37 @@
-import { mkdtemp, rm } from 'node:fs/promises';
-import { tmpdir } from 'node:os';
-import { join } from 'node:path';
-
 import { encode } from 'next-auth/jwt';
 import { afterAll, beforeAll } from 'vitest';
 
 import { connect, type Db } from '@/db/client';
-import { startPaymentsServer, type PaymentsServer } from '@/fakes/payments/server';
 import { env } from '@/lib/env';
 
 import { makeDatabase } from '../services/database';
 import { bundle, Killable } from './killable';
 
 const DOOR_PORT = 5701;
-const WORKER_PORT = 5741;
 const DOOR = `http://127.0.0.1:${DOOR_PORT}`;
-const SECRET = 'whsec_of_the_fault_tests';
 const COOKIE = 'authjs.session-token';
 
 export interface Setting {
   db: Db;
   owner: Db;
   door: Killable;
-  worker: Killable;
-  payments: PaymentsServer;
 }
 
-/** A database, a door and a worker to be killed, and a payment service that lives on. */
+/** A database, and a door to be killed. */
 export function openSetting(): Setting {
   const setting = {} as Setting;
   let close = () => Promise.resolve();
   beforeAll(async () => {
     const database = await makeDatabase();
     const [app, owner] = [connect(database.appUrl), connect(database.ownerUrl, 4)];
-    const folder = await mkdtemp(join(tmpdir(), 'faults-'));
-    const payments = await startPaymentsServer({ port: 0, file: join(folder, 'payments.json'), webhookUrl: `${DOOR}/api/webhooks/payments`, webhookSecret: SECRET, settleAfterMs: 50 });
-    const settings = { DATABASE_URL: database.appUrl, DATABASE_OWNER_URL: database.ownerUrl, APP_URL: DOOR, WORKER_PORT: String(WORKER_PORT), STRIPE_API_BASE: payments.address, STRIPE_SECRET_KEY: 'sk_test_local', STRIPE_WEBHOOK_SECRET: SECRET, LOG_LEVEL: 'silent', NODE_ENV: 'production' };
+    const settings = { DATABASE_URL: database.appUrl, DATABASE_OWNER_URL: database.ownerUrl, APP_URL: DOOR, LOG_LEVEL: 'silent', NODE_ENV: 'production' };
     const door = new Killable(await bundle('tests/faults/door.ts', 'door'), [String(DOOR_PORT)], settings, `${DOOR}/api/health`);
-    const worker = new Killable(await bundle('lib/jobs/worker.ts', 'worker'), [], settings, `http://127.0.0.1:${WORKER_PORT}/health`);
-    Object.assign(setting, { db: app.db, owner: owner.db, door, worker, payments });
+    Object.assign(setting, { db: app.db, owner: owner.db, door });
     await door.start();
     close = async () => {
-      await Promise.all([door.kill(), worker.kill(), payments.close()]);
+      await door.kill();
       await Promise.all([app.pool.end(), owner.pool.end()]);
       await database.drop();
-      await rm(folder, { recursive: true, force: true });
     };
   });
   afterAll(() => close());
