@@ -43,7 +43,7 @@ export function NonconformanceScreen({ nonconformanceId }: { nonconformanceId: s
               </Section>
             ) : (
               <Edge level="note">
-                <strong>Closed:</strong> all <Pieces count={data.pieces} /> are decided about, <Moment at={new Date(data.closedAt)} clock={clock} />.
+                <strong>Closed:</strong> nothing is left to decide, <Moment at={new Date(data.closedAt)} clock={clock} />.
               </Edge>
             )}
           </>
