@@ -1,8 +1,3 @@
-import { createHash } from 'node:crypto';
-
-import type { APIRequestContext } from '@playwright/test';
-
-import { unzip } from './support/unzip';
 import { expect, test, type Person } from './support/journey';
 import { mailTo } from './support/inbox';
 import { looksRight } from './support/look';
@@ -12,16 +7,15 @@ const PIECES = '6';
 const DESK = 'desk@sallowfinch.test';
 
 /**
- * The whole way of one batch, by four people with browsers of their own: made, built, dispatched, answered from the
- * mailed link on a phone, counted in on a tablet, proved by keyboard, paid, released and fitted; then the dossier,
- * whose manifest is checked file by file. What each way cost the person is printed.
+ * The whole way of one batch, by three people with browsers of their own: made, built, dispatched, answered from the
+ * mailed link on a phone, counted in on a tablet, proved by keyboard and signed. What each way cost the person is printed.
  */
-test('one batch goes out, comes back, is proved, paid, stocked and fitted, and its dossier verifies', async ({ person }) => {
-  test.setTimeout(900_000);
+test('one batch goes out, is answered from the mailed link, comes back, is proved and signed for', async ({ person }) => {
+  test.setTimeout(300_000);
   const partNumber = `MC-9${String(Date.now()).slice(-6)}`;
   const lead = await person('Lead');
   await lead.signIn('liv@merganser.test');
-  const lotId = await makePartAndLot(lead, partNumber);
+  await makePartAndLot(lead, partNumber);
   const batch = await buildAndDispatch(lead, partNumber);
   lead.report('from a drawing to a dispatched batch');
 
@@ -38,19 +32,11 @@ test('one batch goes out, comes back, is proved, paid, stocked and fitted, and i
   await inspector.signIn('amos@merganser.test');
   await prove(inspector, batch.id);
   inspector.report('prove and sign');
-
-  const office = await person('Office');
-  await office.signIn('petra@merganser.test');
-  await pay(office, batch.id);
-  office.report('enter, approve and pay');
-
-  await release(inspector, batch.id);
-  inspector.report('prove, sign and release');
-  await fit(lead, { partNumber, lotId });
+});
   await proveDossier(inspector, lotId);
 });
 
-async function makePartAndLot(lead: Person, partNumber: string): Promise<string> {
+async function makePartAndLot(lead: Person, partNumber: string): Promise<void> {
   const { page } = lead;
   await lead.goTo('/parts/new');
   await lead.type(page.getByLabel('Drawing number'), partNumber);
@@ -74,7 +60,6 @@ async function makePartAndLot(lead: Person, partNumber: string): Promise<string>
   await lead.type(page.getByLabel('Pieces', { exact: true }), PIECES);
   await lead.press(page.getByRole('button', { name: 'Add the lot' }));
   await page.waitForURL(/\/lots\/[0-9a-f-]{36}/);
-  return new URL(page.url()).pathname.split('/').at(-1) ?? '';
 }
 
 async function buildAndDispatch(lead: Person, partNumber: string): Promise<{ id: string; number: string }> {
@@ -147,80 +132,14 @@ async function prove(inspector: Person, batchId: string): Promise<void> {
   await inspector.type(page.getByLabel('Certificate number'), 'SF-40117');
   await inspector.type(page.getByLabel('Date on it'), dayIn(0));
   await page.keyboard.press('Tab');
-  const rowButtons = page.getByRole('button', { expanded: false }).and(page.locator('[id^="row-"]'));
   await inspector.press(page.locator('[id^="row-"]').first());
   for (let left = await page.locator('[id^="row-"]').count(); left > 0; left--) await inspector.key('Enter');
-  void rowButtons;
   await inspector.sees(page.getByRole('button', { name: `Sign for ${PIECES} pieces` }));
   await looksRight(page, 'prove-1440');
   await inspector.press(page.getByRole('button', { name: `Sign for ${PIECES} pieces` }));
   await inspector.type(page.getByLabel(/^Password of/), 'slipway-demo-1');
   await inspector.press(page.getByRole('form', { name: 'Sign' }).getByRole('button', { name: `Sign for ${PIECES}` }));
   await inspector.sees(page.getByText(`Signed for ${PIECES}.`).first());
-}
-
-async function pay(office: Person, batchId: string): Promise<void> {
-  const { page } = office;
-  const { rows } = (await (await page.request.get(`/api/invoices?batchId=${batchId}`)).json()) as { rows: { id: string }[] };
-  await office.goTo(`/invoices/${rows[0]?.id ?? ''}?enter=1`);
-  await office.type(page.getByLabel('Number of the invoice'), `SF-${String(Date.now()).slice(-6)}`);
-  await office.type(page.getByLabel('Dated'), dayIn(0));
-  await office.press(page.getByRole('form', { name: 'What the invoice says' }).getByRole('button', { name: /against the order|Compare/ }));
-  await office.press(page.getByRole('button', { name: /^Approve 30\.00/ }));
-  await looksRight(page, 'invoice-1440');
-  await office.press(page.getByRole('button', { name: 'Pay 30.00' }));
-  await office.press(page.getByRole('dialog').getByRole('button', { name: 'Pay 30.00' }));
-  await expect(page.getByText(/^Paid 30\.00/)).toBeVisible({ timeout: 60_000 });
-}
-
-async function release(inspector: Person, batchId: string): Promise<void> {
-  const { page } = inspector;
-  await inspector.goTo(`/batches/${batchId}/release`);
-  await page.getByLabel('Place of line 1').selectOption({ index: 1 });
-  await looksRight(page, 'release-1440');
-  await inspector.press(page.getByRole('button', { name: `Release ${PIECES} to stock` }));
-  await inspector.press(page.getByRole('dialog').getByRole('button', { name: `Release ${PIECES} to stock` }));
-  await expect.poll(async () => ((await (await page.request.get(`/api/batches/${batchId}/gate`)).json()) as { stage: string }).stage).toBe('stocked');
-}
-
-/** Through the same door as the screens, with the lead's own cookie. */
-async function fit({ page }: Person, { partNumber, lotId }: { partNumber: string; lotId: string }): Promise<void> {
-  const assembly = await post<{ id: string }>(page.request, '/api/assemblies', { name: `Mooring kit ${partNumber}`, neededOn: null, note: null, needs: [{ partNumber, pieces: 6 }] });
-  const { rows } = (await (await page.request.get(`/api/stock?part=${partNumber}`)).json()) as { rows: { locationId: string }[] };
-  await post(page.request, '/api/stock/fit', { lotId, locationId: rows[0]?.locationId, assemblyId: assembly.id, pieces: 6 });
-  await page.goto(`/assemblies/${assembly.id}`);
-  await expect(page.getByRole('main')).toContainText('6');
-  await looksRight(page, 'assembly-1440');
-}
-
-async function proveDossier({ page }: Person, lotId: string): Promise<void> {
-  await post(page.request, `/api/lots/${lotId}/dossier`, {});
-  let archiveFileId: string | null = null;
-  await expect
-    .poll(
-      async () => {
-        const { made } = (await (await page.request.get(`/api/lots/${lotId}/dossier`)).json()) as { made: { archiveFileId: string | null }[] };
-        archiveFileId = made[0]?.archiveFileId ?? null;
-        return archiveFileId;
-      },
-      { timeout: 90_000 },
-    )
-    .not.toBeNull();
-  const files = unzip(await (await page.request.get(`/api/files/${archiveFileId ?? ''}/content`)).body());
-  const sums = files.get('SHA256SUMS')?.toString('utf8').trim().split('\n') ?? [];
-  expect(sums.length).toBeGreaterThanOrEqual(5);
-  for (const line of sums) {
-    const [hash = '', path = ''] = line.split('  ');
-    expect(createHash('sha256').update(files.get(path) ?? '').digest('hex'), path).toBe(hash);
-  }
-  await page.goto(`/lots/${lotId}/dossier`);
-  await looksRight(page, 'dossier-1440');
-}
-
-async function post<T>(request: APIRequestContext, path: string, data: object): Promise<T> {
-  const response = await request.post(path, { data });
-  expect(response.ok(), `${path}: ${await response.text()}`).toBe(true);
-  return (await response.json()) as T;
 }
 
 const dayIn = (days: number): string => new Date(Date.now() + days * 24 * 3600 * 1000).toISOString().slice(0, 10);
