@@ -33,8 +33,6 @@ test('one batch goes out, is answered from the mailed link, comes back, is prove
   await prove(inspector, batch.id);
   inspector.report('prove and sign');
 });
-  await proveDossier(inspector, lotId);
-});
 
 async function makePartAndLot(lead: Person, partNumber: string): Promise<void> {
   const { page } = lead;
