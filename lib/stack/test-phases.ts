@@ -70,6 +70,7 @@ async function runVitest(project: string, env: Env): Promise<Tally> {
   const reporters = ['--reporter=default', '--reporter=json', `--outputFile.json=${file}`];
   const code = await runNode([VITEST, 'run', '--project', project, ...reporters], {
     ...env,
+    LOG_LEVEL: 'silent',
     VITE_CONFIG_NATIVE_IGNORE_WARNING: 'true',
   });
   return tallyVitest(file, code);

@@ -136,8 +136,8 @@ describe('who may', () => {
     const { world, batchId } = await makeSent(base);
     const other = await world.as(['lead'], (ctx) => makeDispatchedBatch(ctx, world.processorId));
     const stranger = await makeWorld(base.db, base.owner);
-    for (const attempt of [stranger.asProcessor((ctx) => acknowledge(ctx, { batchId })), world.asProcessor((ctx) => acknowledge(ctx, { batchId }), other.id)]) {
-      expect(await refusalOf(attempt)).toMatchObject({ code: 'not_found' });
+    for (const attempt of [() => stranger.asProcessor((ctx) => acknowledge(ctx, { batchId })), () => world.asProcessor((ctx) => acknowledge(ctx, { batchId }), other.id)]) {
+      expect(await refusalOf(attempt())).toMatchObject({ code: 'not_found' });
     }
     expect(await refusalOf(world.asProcessor((ctx) => getPortalBatch(ctx, { batchId }), other.id))).toMatchObject({ code: 'not_found' });
     await world.as(['lead'], async (ctx) => expect(await stageNow(ctx, batchId)).toBe('dispatched'));
