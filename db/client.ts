@@ -21,6 +21,8 @@ export function connect(url: string, max = 20): { db: Db; pool: pg.Pool } {
   const pool = new pg.Pool({ connectionString: url, max, connectionTimeoutMillis: 10_000 });
   // A connection that dies while idle (database restarted) is replaced by the pool; without a listener it would end the process.
   pool.on('error', () => undefined);
+  // The same for one that dies between two statements of a transaction: the next statement fails, which is enough.
+  pool.on('connect', (client) => client.on('error', () => undefined));
   return { db: drizzle(pool), pool };
 }
 

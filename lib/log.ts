@@ -7,6 +7,7 @@ export const log = pino({
   base: null,
   timestamp: pino.stdTimeFunctions.isoTime,
   formatters: { level: (label) => ({ level: label }) },
+  serializers: { error: describeError },
   // Whatever is logged by accident, these never reach a file.
   redact: {
     paths: [
@@ -25,3 +26,12 @@ export const log = pino({
     censor: '[removed]',
   },
 });
+
+/** Chosen fields only: errors of clients carry the whole client with them, settings included. */
+function describeError(error: unknown): unknown {
+  if (!(error instanceof Error)) return error;
+  const { name, message, stack, cause } = error;
+  const code = 'code' in error ? { code: error.code } : {};
+  const deeper = cause === undefined ? {} : { cause: describeError(cause) };
+  return { name, message, ...code, ...deeper, stack };
+}

@@ -9,12 +9,14 @@ import { log } from '@/lib/log';
 
 import { ALL_JOBS } from './all-jobs';
 import type { Job, JobTools } from './job';
+import { patientConnection } from './patient-connection';
 import { QUEUES } from './queues';
 
 /** The worker process: runs queued jobs until it is told to stop, then finishes the ones in hand. */
 async function main(): Promise<void> {
   const { db, pool } = connect(env.DATABASE_URL, 10);
-  const boss = new PgBoss({ connectionString: env.DATABASE_URL, schema: 'pgboss', migrate: false, max: 6, archiveFailedAfterSeconds: 90 * 24 * 3600 });
+  const queue = patientConnection(env.DATABASE_URL, 6);
+  const boss = new PgBoss({ db: queue, schema: 'pgboss', migrate: false, archiveFailedAfterSeconds: 90 * 24 * 3600 });
   boss.on('error', (error) => log.error({ error }, 'queue'));
   await boss.start();
   for (const job of ALL_JOBS) await listen(boss, db, job);
@@ -26,7 +28,7 @@ async function main(): Promise<void> {
     stopping = true;
     health.close();
     await boss.stop({ graceful: true, timeout: 6000, close: true });
-    await pool.end();
+    await Promise.all([queue.close(), pool.end()]);
     process.exit(0);
   };
   process.on('SIGTERM', () => void stop());
