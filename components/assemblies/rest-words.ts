@@ -1,6 +1,6 @@
 import type { AssemblyNeedRow, Wait } from '@/lib/assemblies/contract';
 import { type Clock, dayWords, daysUntil } from '@/lib/day-words';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 
 export interface RestWords {
   says: string;

@@ -13,7 +13,7 @@ import { BatchTag } from '@/components/ui/tag';
 import { getBatchChecks } from '@/lib/batches/check-contract';
 import { getBatch, putBatchAside, type Batch } from '@/lib/batches/contract';
 import { calendarDay } from '@/lib/day-words';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 
 import { CancelDialog } from './cancel-dialog';
 import { DispatchDialog } from './dispatch-dialog';

@@ -15,7 +15,7 @@ import { BatchTag } from '@/components/ui/tag';
 import { listBatches, type BatchRow } from '@/lib/batches/contract';
 import { STAGES, type Stage } from '@/lib/batches/stage';
 import { calendarDay, shortDayWords, type Clock } from '@/lib/day-words';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 
 export interface BatchFilter {
   stage?: Stage;

@@ -11,7 +11,7 @@ import { LoadNumber } from '@/components/ui/frame-number';
 import { Section } from '@/components/ui/section';
 import { Cell, Row, Table } from '@/components/ui/table';
 import { getBatch, getBatchLines, type BatchLine } from '@/lib/batches/contract';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 
 import { LineEditor } from './line-editor';
 import { areaText, areaUnit, massText, massUnit, sumOfKnown, type Units } from './measures';

@@ -16,7 +16,7 @@ import { createBatch } from '@/lib/batches/contract';
 import { specificationWords } from '@/lib/batches/step-asked';
 import { listStepProcessors, listWaitingLots, type WaitingLot } from '@/lib/batches/waiting-contract';
 import { dayWords } from '@/lib/day-words';
-import { PROCESS_WORDS, type Process } from '@/lib/parts/process';
+import { PROCESS_WORDS, type Process } from '@/lib/trade/process';
 
 import { LotChoice } from './lot-choice';
 import { useBatchWrite } from './use-batch-write';

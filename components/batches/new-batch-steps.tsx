@@ -10,7 +10,7 @@ import { Cell, Row, Table } from '@/components/ui/table';
 import { specificationWords } from '@/lib/batches/step-asked';
 import { listWaitingSteps, type WaitingStep } from '@/lib/batches/waiting-contract';
 import { calendarDay } from '@/lib/day-words';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 
 const COLUMNS = [{ says: 'Step' }, { says: 'Specification' }, { says: 'Lots', right: true }, { says: 'Pieces', right: true }, { says: 'Oldest lot of' }];
 

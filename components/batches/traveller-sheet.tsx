@@ -1,6 +1,6 @@
 import type { TravellerSays } from '@/lib/batches/paper-contract';
 import { dayWords } from '@/lib/day-words';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 
 // Paper outlives its year, so it names it: seen from here no day is of this year.
 const ALWAYS_WITH_YEAR = new Date(0);

@@ -3,7 +3,7 @@ import { useState } from 'react';
 
 import { BatchTag } from '@/components/ui/tag';
 import { GroupRow, Table } from '@/components/ui/table';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 
 import { CertificateHead } from './certificate-head';
 import { CertificateWarnings } from './certificate-warnings';

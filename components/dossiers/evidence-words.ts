@@ -1,6 +1,6 @@
 import { PLACE_WORDS } from '@/components/lots/place-words';
 import type { DossierBatch } from '@/lib/dossiers/content';
-import { PROCESS_WORDS, type Process } from '@/lib/parts/process';
+import { PROCESS_WORDS, type Process } from '@/lib/trade/process';
 import type { Place } from '@/lib/stock/places';
 
 export const processWords = (process: string): string => PROCESS_WORDS[process as Process] ?? process;

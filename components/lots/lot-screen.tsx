@@ -15,7 +15,7 @@ import { BatchTag } from '@/components/ui/tag';
 import { TitleCells } from '@/components/ui/title-cells';
 import { materialWords } from '@/lib/batches/material-words';
 import { getLot, type Lot } from '@/lib/lots/contract';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 import { Ledger } from './ledger';
 import { LotFacts } from './lot-facts';
 import { MillCertificate } from './mill-certificate';

@@ -12,7 +12,7 @@ import { PageHead } from '@/components/ui/page-head';
 import { Segments } from '@/components/ui/segments';
 import { Cell, Row, Table } from '@/components/ui/table';
 import { listLots, type LotRow, type Whereabouts } from '@/lib/lots/contract';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 import { FindField } from './find-field';
 import { KindsSegments } from './kinds-segments';
 import { PlacesBar } from './places-bar';

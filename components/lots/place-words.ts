@@ -1,6 +1,6 @@
 import type { Stage } from '@/lib/batches/stage';
 import type { Holder, Spot } from '@/lib/lots/contract';
-import { PROCESS_WORDS, type Process } from '@/lib/parts/process';
+import { PROCESS_WORDS, type Process } from '@/lib/trade/process';
 import { PLACES, type Place } from '@/lib/stock/places';
 
 /** Where pieces are, as one says it of them: "14 waiting". */

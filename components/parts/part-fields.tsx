@@ -4,7 +4,7 @@ import { useFormContext } from 'react-hook-form';
 import { Checkbox } from '@/components/ui/choice';
 import { SelectField, TextArea, TextField } from '@/components/ui/field';
 import { Section } from '@/components/ui/section';
-import { PRODUCT_FORMS } from '@/lib/parts/process';
+import { PRODUCT_FORMS } from '@/lib/trade/process';
 import type { PartValues } from './part-form-values';
 
 interface Frozen {

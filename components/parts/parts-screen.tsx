@@ -16,7 +16,7 @@ import { Segments } from '@/components/ui/segments';
 import { Cell, Row, Table } from '@/components/ui/table';
 import { materialWords } from '@/lib/batches/material-words';
 import { listParts, type PartRow } from '@/lib/parts/contract';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 
 export interface PartFilter {
   text?: string;

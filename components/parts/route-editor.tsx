@@ -5,7 +5,7 @@ import { Button } from '@/components/ui/button';
 import { Empty } from '@/components/ui/empty';
 import { FieldError, SelectField, TextField } from '@/components/ui/field';
 import { Section } from '@/components/ui/section';
-import { PROCESS_WORDS, PROCESSES } from '@/lib/parts/process';
+import { PROCESS_WORDS, PROCESSES } from '@/lib/trade/process';
 import { EMPTY_STEP, type PartValues } from './part-form-values';
 import { ProofEditor } from './proof-editor';
 

@@ -3,7 +3,7 @@ import { Empty } from '@/components/ui/empty';
 import { Section } from '@/components/ui/section';
 import { Cell, Row, Table } from '@/components/ui/table';
 import type { Part, RouteStep } from '@/lib/parts/contract';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 
 const PROOF_COLUMNS = [{ says: 'To be proved' }, { says: 'Limit' }, { says: 'From' }];
 

@@ -2,7 +2,7 @@ import { BatchTag } from '@/components/ui/tag';
 import { Button, ButtonLink } from '@/components/ui/button';
 import { Caution } from '@/components/ui/edge';
 import { dayWords } from '@/lib/day-words';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 import type { LinkFace } from '@/lib/portal/link-contract';
 
 interface LinkOpenProps {

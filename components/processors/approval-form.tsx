@@ -9,7 +9,7 @@ import { CheckboxGroup } from '@/components/ui/choice';
 import { DateField, TextField } from '@/components/ui/field';
 import { showMessage } from '@/components/ui/message';
 import { addDays } from '@/lib/day-words';
-import { PROCESS_WORDS, PROCESSES, type Process } from '@/lib/parts/process';
+import { PROCESS_WORDS, PROCESSES, type Process } from '@/lib/trade/process';
 import { addApproval, getProcessor, listProcessors } from '@/lib/processors/contract';
 
 interface ApprovalFormProps {

@@ -11,7 +11,7 @@ import { Section } from '@/components/ui/section';
 import { Cell, Row, Table } from '@/components/ui/table';
 import { useClock } from '@/components/session/use-me';
 import { shortDayWords, type Clock } from '@/lib/day-words';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 import { getProcessor, listProcessors, withdrawApproval, type Approval, type Processor } from '@/lib/processors/contract';
 
 import { ApprovalForm } from './approval-form';

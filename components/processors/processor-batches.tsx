@@ -11,7 +11,7 @@ import { BatchTag } from '@/components/ui/tag';
 import { useClock } from '@/components/session/use-me';
 import { listBatches, type BatchRow } from '@/lib/batches/contract';
 import { calendarDay, type Clock } from '@/lib/day-words';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 
 /** Everything that ever went there, newest first. */
 export function ProcessorBatches({ processorId, now }: { processorId: string; now: Date }) {

@@ -11,7 +11,7 @@ import { Loading } from '@/components/ui/loading';
 import { PageHead } from '@/components/ui/page-head';
 import { Cell, Row, Table } from '@/components/ui/table';
 import { daysUntil, type Clock } from '@/lib/day-words';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 import { listProcessors, type ProcessorRow } from '@/lib/processors/contract';
 
 /** Within these days of its end an approval is said in straw. */

@@ -17,7 +17,7 @@ import { PageHead } from '@/components/ui/page-head';
 import { Pieces } from '@/components/ui/pieces';
 import { BatchTag } from '@/components/ui/tag';
 import { TitleCells } from '@/components/ui/title-cells';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 import { countIn, getReceiving, listReceipts } from '@/lib/receipts/contract';
 
 import { CountForm, countOf, emptyCount, sumsOf, type CountFormIn, type CountFormOut } from './count-form';

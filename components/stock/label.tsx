@@ -1,6 +1,6 @@
 import { StageMark } from '@/components/ui/marks';
 import { type Clock, shortDayWords } from '@/lib/day-words';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 import type { Release } from '@/lib/stock/contract';
 
 export interface LabelCode {

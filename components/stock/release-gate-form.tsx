@@ -11,7 +11,7 @@ import { SelectField } from '@/components/ui/field';
 import type { ApiError } from '@/lib/api/client';
 import type { InputOf, OutputOf } from '@/lib/api/endpoint';
 import { listAssemblies } from '@/lib/assemblies/contract';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 import { getGate, listReleases, listStock, releasePieces } from '@/lib/stock/contract';
 
 import { AddPlace } from './add-place';

@@ -8,7 +8,7 @@ import { CheckboxGroup } from '@/components/ui/choice';
 import { SelectField } from '@/components/ui/field';
 import { VerdictMark } from '@/components/ui/marks';
 import { PieceCounter } from '@/components/ui/piece-counter';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 import type { GateLine, Location } from '@/lib/stock/contract';
 
 import { missingWords } from './missing-words';

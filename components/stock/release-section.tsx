@@ -10,7 +10,7 @@ import { Failing } from '@/components/ui/failing';
 import { Loading } from '@/components/ui/loading';
 import { Section } from '@/components/ui/section';
 import { Cell, Row, Table } from '@/components/ui/table';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 import { getGate, listReleases } from '@/lib/stock/contract';
 
 const COLUMNS = [{ says: 'When' }, { says: 'Lot' }, { says: 'Part' }, { says: 'Pieces', right: true }, { says: 'To' }, { says: 'By' }];

@@ -1,7 +1,7 @@
 import Link from 'next/link';
 
 import { shortDayWords } from '@/lib/day-words';
-import { PROCESS_WORDS, type Process } from '@/lib/parts/process';
+import { PROCESS_WORDS, type Process } from '@/lib/trade/process';
 import type { Tideline, TidelineLane } from '@/lib/tideline/contract';
 import type { PlacedLane } from '@/lib/tideline/lay-out';
 import { daysBetween } from '@/lib/tideline/lateness';

@@ -1,7 +1,7 @@
 import { sql } from 'drizzle-orm';
 import { boolean, check, date, foreignKey, index, integer, jsonb, pgEnum, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
 
-import { PROCESSES, PRODUCT_FORMS } from '@/lib/parts/process';
+import { PROCESSES, PRODUCT_FORMS } from '@/lib/trade/process';
 import type { ToProve } from '@/lib/parts/to-prove';
 
 import { createdColumn, idColumn, measure, moment, ownShopOnly, shopColumn } from './columns';

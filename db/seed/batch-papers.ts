@@ -5,7 +5,7 @@ import { shops } from '@/db/schema/organisations';
 import type { Ctx } from '@/lib/auth/context';
 import { inOwningShop } from '@/lib/files/in-owning-shop';
 import { amountText } from '@/lib/money';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 
 import { keepFile } from './keep-file';
 import { dayOf, type DemoProcessor } from './organisations';

@@ -1,6 +1,6 @@
 import { createLot } from '@/lib/lots/create-lot';
 import { getPart } from '@/lib/parts/queries';
-import type { Process } from '@/lib/parts/process';
+import type { Process } from '@/lib/trade/process';
 
 import { batchThread, type BatchPlot, type Crew } from './batch-thread';
 import { keepFile } from './keep-file';

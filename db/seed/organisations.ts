@@ -5,7 +5,7 @@ import { processors, shopProcessors, shops, approvals } from '@/db/schema/organi
 import { memberships, users } from '@/db/schema/people';
 import type { Role } from '@/lib/auth/roles';
 import { newId } from '@/lib/ids';
-import type { Process } from '@/lib/parts/process';
+import type { Process } from '@/lib/trade/process';
 
 import { DEMO_PASSWORD } from './sign-ins';
 

@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { declare } from '@/lib/api/endpoint';
 import { Day, Done, Id, Moment, Pieces } from '@/lib/api/shapes';
 import { STAGES } from '@/lib/batches/stage';
-import { PROCESSES } from '@/lib/parts/process';
+import { PROCESSES } from '@/lib/trade/process';
 
 const Need = z.object({ partNumber: z.string().trim().min(1, 'Enter the part number.').max(80), pieces: Pieces });
 

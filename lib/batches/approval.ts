@@ -1,5 +1,5 @@
 import type { CalendarDay } from '@/lib/day-words';
-import type { Process } from '@/lib/parts/process';
+import type { Process } from '@/lib/trade/process';
 
 /** What an approval says, as far as a batch asks. Scope by equipment and class comes later. */
 export interface Approval {

@@ -2,7 +2,7 @@ import { z } from 'zod';
 
 import { declare } from '@/lib/api/endpoint';
 import { Day, Id, Moment, PageQuery, Pieces, pageOf } from '@/lib/api/shapes';
-import { PROCESSES } from '@/lib/parts/process';
+import { PROCESSES } from '@/lib/trade/process';
 import { ToProve } from '@/lib/parts/to-prove';
 
 import { STAGES } from './stage';

@@ -1,4 +1,4 @@
-import { PROCESS_WORDS, type Process } from '@/lib/parts/process';
+import { PROCESS_WORDS, type Process } from '@/lib/trade/process';
 
 /** What one batch does to all its lines: the process, to one specification at one revision, in one class. */
 export interface StepAsked {

@@ -2,7 +2,7 @@ import { z } from 'zod';
 
 import { declare } from '@/lib/api/endpoint';
 import { Id, Moment, PageQuery, pageOf } from '@/lib/api/shapes';
-import { PROCESSES } from '@/lib/parts/process';
+import { PROCESSES } from '@/lib/trade/process';
 
 const Step = z.object({ process: z.enum(PROCESSES), specification: z.string(), specificationRevision: z.string().nullable(), classType: z.string().nullable() });
 

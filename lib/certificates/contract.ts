@@ -4,7 +4,7 @@ import { declare } from '@/lib/api/endpoint';
 import { Day, Id, Moment, PageQuery, pageOf, Pieces } from '@/lib/api/shapes';
 import { STAGES } from '@/lib/batches/stage';
 import { REQUIREMENT_SOURCES } from '@/lib/parts/to-prove';
-import { PROCESSES } from '@/lib/parts/process';
+import { PROCESSES } from '@/lib/trade/process';
 
 import { VERDICTS } from './verdict';
 

@@ -4,7 +4,7 @@ import { declare } from '@/lib/api/endpoint';
 import { Day, Id, Moment, PageQuery, Pieces, pageOf } from '@/lib/api/shapes';
 import { STAGES } from '@/lib/batches/stage';
 import { FileRef, PiecesAt } from '@/lib/parts/contract';
-import { PROCESSES, PRODUCT_FORMS } from '@/lib/parts/process';
+import { PROCESSES, PRODUCT_FORMS } from '@/lib/trade/process';
 import { PLACES } from '@/lib/stock/places';
 
 import { MOST_ROWS, RawRow } from './import-row';

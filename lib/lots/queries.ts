@@ -11,7 +11,7 @@ import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
 import { notFound } from '@/lib/errors';
 import { fileRefColumns } from '@/lib/files/queries';
-import type { Process } from '@/lib/parts/process';
+import type { Process } from '@/lib/trade/process';
 import { patternsOf } from '@/lib/search/patterns';
 import type { Place } from '@/lib/stock/places';
 

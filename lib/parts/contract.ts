@@ -5,7 +5,7 @@ import { Id, Moment, PageQuery, pageOf } from '@/lib/api/shapes';
 import { PLACES } from '@/lib/stock/places';
 
 import { readMeasure, type Quantity } from './measure';
-import { PROCESSES, PRODUCT_FORMS } from './process';
+import { PROCESSES, PRODUCT_FORMS } from '@/lib/trade/process';
 import { ToProve } from './to-prove';
 
 const must = (name: string, longest: number) => z.string(`${name} is missing.`).trim().min(1, `${name} is missing.`).max(longest, `${name} is longer than ${longest} letters.`);

@@ -13,7 +13,7 @@ import { madeOfLot, placesOfLot } from '@/lib/lots/where-pieces-are';
 import { contains, patternsOf } from '@/lib/search/patterns';
 
 import type { listParts as listDeclaration, PiecesAt } from './contract';
-import type { Process } from './process';
+import type { Process } from '@/lib/trade/process';
 
 const LOTS_SHOWN = 50;
 

@@ -7,7 +7,7 @@ import { newId } from '@/lib/ids';
 
 import type { StepInput } from './contract';
 import { orNull } from './part-columns';
-import { PROCESS_WORDS } from './process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 
 /**
  * Makes the route of a part exactly these steps in this order. Steps keep their identity, because pieces wait for them

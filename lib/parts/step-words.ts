@@ -1,5 +1,5 @@
 import type { ToProve } from './to-prove';
-import { PROCESS_WORDS, type Process } from './process';
+import { PROCESS_WORDS, type Process } from '@/lib/trade/process';
 
 interface Step {
   process: Process;

@@ -1,7 +1,7 @@
 import { Document, Text, View } from '@react-pdf/renderer';
 
 import type { DossierBatch, DossierContent } from '@/lib/dossiers/content';
-import { PROCESS_WORDS, type Process } from '@/lib/parts/process';
+import { PROCESS_WORDS, type Process } from '@/lib/trade/process';
 
 import { COND, MONO } from './fonts';
 import { INK, RULE, type } from './look';

@@ -1,5 +1,5 @@
 import { dayWords, momentWords } from '@/lib/day-words';
-import { PROCESS_WORDS } from '@/lib/parts/process';
+import { PROCESS_WORDS } from '@/lib/trade/process';
 import type { PaperContent, TravellerContent } from '@/lib/travellers/content';
 
 // Paper outlives its year, so it always names it: seen from here no day is of this year.

@@ -1,4 +1,4 @@
-import { PROCESS_WORDS, type Process } from '@/lib/parts/process';
+import { PROCESS_WORDS, type Process } from '@/lib/trade/process';
 
 /** `solution, quench and age to T42`; without the condition where the lines end in different ones. */
 export function askedWords(process: Process, conditions: readonly (string | null)[]): string {

@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { declare } from '@/lib/api/endpoint';
 import { Done, Id, Moment } from '@/lib/api/shapes';
 import { STAGES } from '@/lib/batches/stage';
-import { PROCESSES } from '@/lib/parts/process';
+import { PROCESSES } from '@/lib/trade/process';
 
 /** How it stands with a link: it opens, the shop has taken it back, its batch is over, or we never made it. */
 export const LINK_STATES = ['open', 'withdrawn', 'settled', 'cancelled', 'unknown'] as const;

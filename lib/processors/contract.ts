@@ -2,7 +2,7 @@ import { z } from 'zod';
 
 import { declare } from '@/lib/api/endpoint';
 import { Day, Done, Id, Moment, PageQuery, pageOf } from '@/lib/api/shapes';
-import { PROCESSES } from '@/lib/parts/process';
+import { PROCESSES } from '@/lib/trade/process';
 import { Email } from '@/lib/people/account-contract';
 
 const Name = z.string().trim().min(1, 'Enter the name.').max(160, 'Use 160 characters or less.');

@@ -7,7 +7,7 @@ import { authorize } from '@/lib/auth/authorize';
 import { shopOf, type Ctx } from '@/lib/auth/context';
 import { calendarDay } from '@/lib/day-words';
 import { AppError, notFound } from '@/lib/errors';
-import type { Process } from '@/lib/parts/process';
+import type { Process } from '@/lib/trade/process';
 
 import type { APPROVAL_STATES, getProcessor as getDeclaration, listProcessors as listDeclaration } from './contract';
 

@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { declare } from '@/lib/api/endpoint';
 import { Id, Moment } from '@/lib/api/shapes';
 import { STAGES } from '@/lib/batches/stage';
-import { PROCESSES } from '@/lib/parts/process';
+import { PROCESSES } from '@/lib/trade/process';
 
 const Count = z.int('Enter a whole number of pieces.').min(0, 'Enter 0 or more.').max(1_000_000, 'Enter 1,000,000 or less.');
 const Note = z.string().trim().max(500, 'Write 500 characters or less.');

@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { declare } from '@/lib/api/endpoint';
 import { Day, Done, Id, Moment, PageQuery, pageOf, Pieces } from '@/lib/api/shapes';
 import { STAGES } from '@/lib/batches/stage';
-import { PROCESSES } from '@/lib/parts/process';
+import { PROCESSES } from '@/lib/trade/process';
 
 export const Location = z.object({ id: Id, name: z.string(), pieces: z.int(), closed: z.boolean() });
 export type Location = z.output<typeof Location>;

@@ -2,7 +2,7 @@ import { sql } from 'drizzle-orm';
 
 import type { Ctx } from '@/lib/auth/context';
 import { readFacts } from '@/lib/batches/refresh-standing';
-import type { Process } from '@/lib/parts/process';
+import type { Process } from '@/lib/trade/process';
 import { readLineStanding, type LineStanding } from '@/lib/receipts/line-standing';
 
 import { releaseGate, type GateVerdict } from './gate';

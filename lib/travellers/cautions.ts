@@ -1,4 +1,4 @@
-import type { Process } from '@/lib/parts/process';
+import type { Process } from '@/lib/trade/process';
 
 /**
  * What stands on every traveller. Cautions of a process come with the trade library and its sources; none is made up

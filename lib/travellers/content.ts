@@ -1,7 +1,7 @@
 import { z } from 'zod';
 
 import { FrozenLine } from '@/lib/batches/frozen-line';
-import { PROCESSES } from '@/lib/parts/process';
+import { PROCESSES } from '@/lib/trade/process';
 
 /** Sheet sizes of the papers. */
 export const PAPERS = ['letter', 'a4'] as const;

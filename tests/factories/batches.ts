@@ -5,7 +5,7 @@ import { dispatchBatch } from '@/lib/batches/dispatch-batch';
 import { setRequirements } from '@/lib/batches/set-requirements';
 import { calendarDay, addDays } from '@/lib/day-words';
 import { newId } from '@/lib/ids';
-import { PROCESSES } from '@/lib/parts/process';
+import { PROCESSES } from '@/lib/trade/process';
 import type { ToProve } from '@/lib/parts/to-prove';
 
 import { makeLot } from './lots';

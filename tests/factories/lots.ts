@@ -2,7 +2,7 @@ import { lots, pieces as namedPieces } from '@/db/schema/lots';
 import { parts, routeSteps } from '@/db/schema/parts';
 import { shopOf, type Ctx } from '@/lib/auth/context';
 import { newId } from '@/lib/ids';
-import type { Process } from '@/lib/parts/process';
+import type { Process } from '@/lib/trade/process';
 import { movePieces } from '@/lib/stock/move-pieces';
 
 /** A part with a route of the given steps. */
