@@ -33,7 +33,8 @@ module.exports = {
     },
     {
       name: 'pages-go-through-lib',
-      comment: 'Only the glue in app/_kit may open a transaction; the bare pages measure the database itself.',
+      comment:
+        'Only the glue in app/_kit may open a transaction; the bare pages measure the database itself.',
       severity: 'error',
       from: { path: '^app/', pathNot: '^app/(_kit|dev/bare|api/dev/bare)/' },
       to: { path: '^db/' },

@@ -12,7 +12,8 @@ export default function PageError({ error, reset }: PageErrorProps) {
     <main className="px-6 py-9 max-md:px-4">
       <h1>This page did not open</h1>
       <p className="max-w-prose py-3">
-        The fault is ours and is written down. What you saved before is kept; what was being typed here may be lost.
+        The fault is ours and is written down. What you saved before is kept; what was being typed here may be
+        lost.
         {error.digest && (
           <span className="block text-quiet">
             Say <span className="num">{error.digest}</span> when you report it.

@@ -45,10 +45,26 @@ const condExtended = localFont({
   adjustFontFallback: false,
   declarations: [{ prop: 'unicode-range', value: 'U+0100-02BA,U+1E00-1E9F,U+20A0-20AB,U+20AD-20C0' }],
   src: [
-    { path: '../public/fonts/barlow-semi-condensed-latin-ext-400-normal.woff2', weight: '400', style: 'normal' },
-    { path: '../public/fonts/barlow-semi-condensed-latin-ext-500-normal.woff2', weight: '500', style: 'normal' },
-    { path: '../public/fonts/barlow-semi-condensed-latin-ext-600-normal.woff2', weight: '600', style: 'normal' },
-    { path: '../public/fonts/barlow-semi-condensed-latin-ext-700-normal.woff2', weight: '700', style: 'normal' },
+    {
+      path: '../public/fonts/barlow-semi-condensed-latin-ext-400-normal.woff2',
+      weight: '400',
+      style: 'normal',
+    },
+    {
+      path: '../public/fonts/barlow-semi-condensed-latin-ext-500-normal.woff2',
+      weight: '500',
+      style: 'normal',
+    },
+    {
+      path: '../public/fonts/barlow-semi-condensed-latin-ext-600-normal.woff2',
+      weight: '600',
+      style: 'normal',
+    },
+    {
+      path: '../public/fonts/barlow-semi-condensed-latin-ext-700-normal.woff2',
+      weight: '700',
+      style: 'normal',
+    },
   ],
 });
 

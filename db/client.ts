@@ -30,7 +30,12 @@ export function connect(url: string, max = 20): { db: Db; pool: pg.Pool } {
  * Opens a transaction as the tenant's database role. The only place that enters a tenant: outside it every query of
  * the application sees no rows.
  */
-export function withTenant<T>(db: Db, tenant: Tenant, work: (tx: Tx) => Promise<T>, keyOwner = ''): Promise<T> {
+export function withTenant<T>(
+  db: Db,
+  tenant: Tenant,
+  work: (tx: Tx) => Promise<T>,
+  keyOwner = '',
+): Promise<T> {
   return db.transaction(async (tx) => {
     await enter(tx, tenant, keyOwner);
     return work(tx);

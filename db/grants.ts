@@ -67,29 +67,104 @@ export const SHOP_GRANTS: Record<string, readonly Verb[] | Columns> = {
 /** The processor's side reads; what it says is written in the shop's name after its own eyes have seen the batch. */
 export const PORTAL_GRANTS: Record<string, readonly Verb[] | Columns> = {
   shops: { select: ['id', 'name', 'address', 'phone', 'zone', 'currency'] },
-  processors: { select: ['id', 'name', 'email', 'phone', 'address', 'zone', 'stripe_account_id', 'payouts_ready'], update: ['name', 'phone', 'address', 'zone', 'stripe_account_id', 'payouts_ready'] },
+  processors: {
+    select: ['id', 'name', 'email', 'phone', 'address', 'zone', 'stripe_account_id', 'payouts_ready'],
+    update: ['name', 'phone', 'address', 'zone', 'stripe_account_id', 'payouts_ready'],
+  },
   shop_processors: { select: ['shop_id', 'processor_id', 'contact_name', 'contact_email', 'active'] },
-  users: { select: ['id', 'email', 'name', 'active', 'units', 'single_keys', 'session_version'], update: ['name', 'units', 'single_keys', 'session_version'] },
+  users: {
+    select: ['id', 'email', 'name', 'active', 'units', 'single_keys', 'session_version'],
+    update: ['name', 'units', 'single_keys', 'session_version'],
+  },
   memberships: READ,
   idempotency_keys: KEEP,
   files: READ,
   batches: {
     select: [
-      'id', 'shop_id', 'number', 'order_number', 'processor_id', 'process', 'specification', 'specification_revision', 'class_type', 'note',
-      'leaves_on', 'wanted_back_on', 'currency', 'lot_minimum_minor', 'certification_fee_minor', 'dispatched_at', 'cancelled_at',
-      'acknowledged_at', 'acknowledged_pieces', 'marked_done_at', 'shipped_at', 'shipped_note', 'stage', 'pieces', 'pieces_back',
-      'first_promised_on', 'promised_on', 'last_back_at', 'version', 'created_at',
+      'id',
+      'shop_id',
+      'number',
+      'order_number',
+      'processor_id',
+      'process',
+      'specification',
+      'specification_revision',
+      'class_type',
+      'note',
+      'leaves_on',
+      'wanted_back_on',
+      'currency',
+      'lot_minimum_minor',
+      'certification_fee_minor',
+      'dispatched_at',
+      'cancelled_at',
+      'acknowledged_at',
+      'acknowledged_pieces',
+      'marked_done_at',
+      'shipped_at',
+      'shipped_note',
+      'stage',
+      'pieces',
+      'pieces_back',
+      'first_promised_on',
+      'promised_on',
+      'last_back_at',
+      'version',
+      'created_at',
     ],
   },
   batch_lines: READ,
   requirements: READ,
-  batch_documents: { select: ['id', 'shop_id', 'batch_id', 'kind', 'document_version', 'changes', 'stated_at', 'file_id', 'sha256'] },
+  batch_documents: {
+    select: [
+      'id',
+      'shop_id',
+      'batch_id',
+      'kind',
+      'document_version',
+      'changes',
+      'stated_at',
+      'file_id',
+      'sha256',
+    ],
+  },
   promises: READ,
   messages: READ,
   receipts: READ,
-  certificates: { select: ['id', 'shop_id', 'batch_id', 'file_id', 'number', 'dated_on', 'sent_by', 'set_aside_at', 'set_aside_reason', 'created_at'] },
+  certificates: {
+    select: [
+      'id',
+      'shop_id',
+      'batch_id',
+      'file_id',
+      'number',
+      'dated_on',
+      'sent_by',
+      'set_aside_at',
+      'set_aside_reason',
+      'created_at',
+    ],
+  },
   charts: READ,
-  invoices: { select: ['id', 'shop_id', 'batch_id', 'processor_id', 'file_id', 'number', 'dated_on', 'due_on', 'currency', 'total_minor', 'sent_by', 'refused_at', 'refused_reason', 'approved_at', 'created_at'] },
+  invoices: {
+    select: [
+      'id',
+      'shop_id',
+      'batch_id',
+      'processor_id',
+      'file_id',
+      'number',
+      'dated_on',
+      'due_on',
+      'currency',
+      'total_minor',
+      'sent_by',
+      'refused_at',
+      'refused_reason',
+      'approved_at',
+      'created_at',
+    ],
+  },
 };
 
 /** Who is this? Nothing of the shop's work is in reach. */
@@ -101,13 +176,37 @@ export const DOOR_GRANTS: Record<string, readonly Verb[] | Columns> = {
   memberships: KEEP,
   invitations: KEEP,
   mailed_links: KEEP,
-  api_tokens: { select: ['id', 'shop_id', 'user_id', 'token_hash', 'scopes', 'expires_at', 'revoked_at', 'name'], update: ['last_used_at'] },
+  api_tokens: {
+    select: ['id', 'shop_id', 'user_id', 'token_hash', 'scopes', 'expires_at', 'revoked_at', 'name'],
+    update: ['last_used_at'],
+  },
   throttles: EDIT,
   idempotency_keys: KEEP,
   // What the page of a link says before anybody is signed in: what was asked, never a price.
-  batches: { select: ['id', 'shop_id', 'processor_id', 'number', 'stage', 'order_number', 'process', 'specification', 'specification_revision', 'class_type', 'pieces', 'wanted_back_on', 'dispatched_at'] },
-  batch_links: { select: ['id', 'shop_id', 'batch_id', 'processor_id', 'token_hash', 'withdrawn_at', 'first_opened_at'], update: ['first_opened_at'] },
-  dossier_links: { select: ['for_whom', 'id', 'shop_id', 'lot_id', 'token_hash', 'expires_at', 'withdrawn_at'] },
+  batches: {
+    select: [
+      'id',
+      'shop_id',
+      'processor_id',
+      'number',
+      'stage',
+      'order_number',
+      'process',
+      'specification',
+      'specification_revision',
+      'class_type',
+      'pieces',
+      'wanted_back_on',
+      'dispatched_at',
+    ],
+  },
+  batch_links: {
+    select: ['id', 'shop_id', 'batch_id', 'processor_id', 'token_hash', 'withdrawn_at', 'first_opened_at'],
+    update: ['first_opened_at'],
+  },
+  dossier_links: {
+    select: ['for_whom', 'id', 'shop_id', 'lot_id', 'token_hash', 'expires_at', 'withdrawn_at'],
+  },
   payments: { select: ['id', 'shop_id', 'invoice_id', 'intent_id'] },
   payment_events: KEEP,
 };
@@ -118,10 +217,18 @@ export function grantStatements(tables: readonly string[]): string[] {
     `revoke all on table "${table}" from app_shop, app_portal, app_door`,
     `alter table "${table}" enable row level security`,
   ]);
-  for (const [role, grants] of [['app_shop', SHOP_GRANTS], ['app_portal', PORTAL_GRANTS], ['app_door', DOOR_GRANTS]] as const) {
+  for (const [role, grants] of [
+    ['app_shop', SHOP_GRANTS],
+    ['app_portal', PORTAL_GRANTS],
+    ['app_door', DOOR_GRANTS],
+  ] as const) {
     for (const [table, what] of Object.entries(grants)) {
       if (isVerbs(what)) statements.push(`grant ${what.join(', ')} on table "${table}" to ${role}`);
-      else for (const [verb, columns] of Object.entries(what)) statements.push(`grant ${verb} (${columns.map((c) => `"${c}"`).join(', ')}) on table "${table}" to ${role}`);
+      else
+        for (const [verb, columns] of Object.entries(what))
+          statements.push(
+            `grant ${verb} (${columns.map((c) => `"${c}"`).join(', ')}) on table "${table}" to ${role}`,
+          );
     }
   }
   return statements;

@@ -9,4 +9,6 @@ const kept = globalThis as typeof globalThis & { lotwrightDb?: Db; lotwrightRepl
 export const primary = (): Db => (kept.lotwrightDb ??= connect(env.DATABASE_URL).db);
 
 /** For reads that may be a moment old; the primary where there is no replica. */
-export const replica = (): Db => (kept.lotwrightReplica ??= env.DATABASE_REPLICA_URL === undefined ? primary() : connect(env.DATABASE_REPLICA_URL).db);
+export const replica = (): Db =>
+  (kept.lotwrightReplica ??=
+    env.DATABASE_REPLICA_URL === undefined ? primary() : connect(env.DATABASE_REPLICA_URL).db);

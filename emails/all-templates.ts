@@ -1,6 +1,13 @@
 import type { FunctionComponent } from 'react';
 
-import { InvitationMail, invitationSubject, ResetMail, resetSubject, SignInMail, signInSubject } from './account';
+import {
+  InvitationMail,
+  invitationSubject,
+  ResetMail,
+  resetSubject,
+  SignInMail,
+  signInSubject,
+} from './account';
 import { BatchCancelledMail, batchCancelledSubject } from './batch-cancelled';
 import { BatchLinkMail, batchLinkSubject } from './batch-link';
 import { DispatchMail, dispatchSubject, reissuedSubject } from './dispatch';

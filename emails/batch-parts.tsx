@@ -3,10 +3,14 @@ import { dayWords, type CalendarDay } from '@/lib/day-words';
 import type { MailProps } from './mail-props';
 import { Num } from './parts';
 
-type OfBatch = Pick<MailProps<'batch-cancelled'>, 'shop' | 'processor' | 'orderNumber' | 'contact' | 'zone' | 'statedAt'>;
+type OfBatch = Pick<
+  MailProps<'batch-cancelled'>,
+  'shop' | 'processor' | 'orderNumber' | 'contact' | 'zone' | 'statedAt'
+>;
 
 /** A calendar day as the mail's reader says it. */
-export const dayIn = (day: CalendarDay, { zone, statedAt }: Pick<OfBatch, 'zone' | 'statedAt'>): string => dayWords(day, { zone, now: new Date(statedAt) });
+export const dayIn = (day: CalendarDay, { zone, statedAt }: Pick<OfBatch, 'zone' | 'statedAt'>): string =>
+  dayWords(day, { zone, now: new Date(statedAt) });
 
 /** `From Tern Slip to Ostrow. Order TS-1187.` */
 export function FromTo({ shop, processor, orderNumber }: OfBatch) {
@@ -31,7 +35,9 @@ export function callWords({ contact, shop }: OfBatch): string {
 export function AnswerFoot({ shop, hasPage }: { shop: string; hasPage: boolean }) {
   return (
     <>
-      An answer to this mail goes to {shop} as an ordinary mail.{hasPage && ' Certificates, charts and invoices are taken on the page of the batch, where they are filed with it.'}
+      An answer to this mail goes to {shop} as an ordinary mail.
+      {hasPage &&
+        ' Certificates, charts and invoices are taken on the page of the batch, where they are filed with it.'}
     </>
   );
 }

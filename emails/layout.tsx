@@ -25,14 +25,40 @@ export function MailLayout({ preview, batch, title, children, foot }: LayoutProp
       </Head>
       <Preview data-skip-in-text="true">{preview}</Preview>
       <Body style={{ margin: 0, padding: 0, backgroundColor: '#FFFFFF' }}>
-        <table role="presentation" align="center" width="600" cellPadding={0} cellSpacing={0} style={{ width: '100%', maxWidth: 600, borderCollapse: 'collapse', background: COLOURS.paper, font: `15px/22px ${SANS}`, color: COLOURS.ink }}>
+        <table
+          role="presentation"
+          align="center"
+          width="600"
+          cellPadding={0}
+          cellSpacing={0}
+          style={{
+            width: '100%',
+            maxWidth: 600,
+            borderCollapse: 'collapse',
+            background: COLOURS.paper,
+            font: `15px/22px ${SANS}`,
+            color: COLOURS.ink,
+          }}
+        >
           <tbody>
             <tr>
               <td style={{ padding: '20px 28px' }}>
                 {batch && <MailTag {...batch} />}
-                <h1 style={{ margin: batch ? '16px 0 6px' : '0 0 6px', font: `700 25px/30px ${COND}` }}>{title}</h1>
+                <h1 style={{ margin: batch ? '16px 0 6px' : '0 0 6px', font: `700 25px/30px ${COND}` }}>
+                  {title}
+                </h1>
                 {children}
-                <div style={{ margin: '18px 0 0', paddingTop: 9, borderTop: `1px solid ${COLOURS.rule}`, font: `12.5px/18px ${SANS}`, color: COLOURS.quiet }}>{foot ?? 'Sent by Lotwright.'}</div>
+                <div
+                  style={{
+                    margin: '18px 0 0',
+                    paddingTop: 9,
+                    borderTop: `1px solid ${COLOURS.rule}`,
+                    font: `12.5px/18px ${SANS}`,
+                    color: COLOURS.quiet,
+                  }}
+                >
+                  {foot ?? 'Sent by Lotwright.'}
+                </div>
               </td>
             </tr>
           </tbody>
@@ -46,13 +72,50 @@ export function MailLayout({ preview, batch, title, children, foot }: LayoutProp
 function MailTag({ number, stage }: { number: string; stage: Stage }) {
   const { edge, ink, wash, mark, word } = STAGE_LOOK[stage];
   return (
-    <table role="presentation" cellPadding={0} cellSpacing={0} style={{ borderCollapse: 'collapse', width: 'auto' }}>
+    <table
+      role="presentation"
+      cellPadding={0}
+      cellSpacing={0}
+      style={{ borderCollapse: 'collapse', width: 'auto' }}
+    >
       <tbody>
         <tr>
-          <td data-skip-in-text="true" style={{ width: 40, height: 44, padding: 0, border: `2px solid ${ink}`, borderRight: 0, background: edge, textAlign: 'center', verticalAlign: 'middle' }}>
-            <span style={{ display: 'inline-block', width: 13, height: 13, border: `1.5px solid ${ink}`, borderRadius: '50%', background: COLOURS.paper, verticalAlign: 'middle' }} />
+          <td
+            data-skip-in-text="true"
+            style={{
+              width: 40,
+              height: 44,
+              padding: 0,
+              border: `2px solid ${ink}`,
+              borderRight: 0,
+              background: edge,
+              textAlign: 'center',
+              verticalAlign: 'middle',
+            }}
+          >
+            <span
+              style={{
+                display: 'inline-block',
+                width: 13,
+                height: 13,
+                border: `1.5px solid ${ink}`,
+                borderRadius: '50%',
+                background: COLOURS.paper,
+                verticalAlign: 'middle',
+              }}
+            />
           </td>
-          <td style={{ padding: '0 16px', border: `2px solid ${ink}`, background: wash, verticalAlign: 'middle', font: `600 22px/40px ${MONO}`, letterSpacing: '-0.03em', whiteSpace: 'nowrap' }}>
+          <td
+            style={{
+              padding: '0 16px',
+              border: `2px solid ${ink}`,
+              background: wash,
+              verticalAlign: 'middle',
+              font: `600 22px/40px ${MONO}`,
+              letterSpacing: '-0.03em',
+              whiteSpace: 'nowrap',
+            }}
+          >
             {number}{' '}
             <span style={{ font: `600 15px/40px ${COND}`, letterSpacing: 0, color: ink }}>
               <span data-skip-in-text="true">{mark} </span>

@@ -3,14 +3,26 @@ import type { Stage } from '@/lib/batches/stage';
 /*
  * Mail programs know no custom properties and no fonts of ours: the tokens of the screens as plain values, by day.
  */
-export const COLOURS = { paper: '#FAF8F3', ink: '#1E2326', quiet: '#565C60', faint: '#6B675C', rule: '#D8D2C4', straw: '#D9B44A', strawInk: '#6F5410', red: '#A23A2A' } as const;
+export const COLOURS = {
+  paper: '#FAF8F3',
+  ink: '#1E2326',
+  quiet: '#565C60',
+  faint: '#6B675C',
+  rule: '#D8D2C4',
+  straw: '#D9B44A',
+  strawInk: '#6F5410',
+  red: '#A23A2A',
+} as const;
 
 export const SANS = "Barlow, 'Helvetica Neue', Arial, sans-serif";
 export const COND = "'Barlow Semi Condensed', 'Arial Narrow', Arial, sans-serif";
 export const MONO = "'Spline Sans Mono', Consolas, Menlo, monospace";
 
 /** The three tones of a stage, its mark as a character that every font has, and its word. */
-export const STAGE_LOOK: Record<Stage, { edge: string; ink: string; wash: string; mark: string; word: string }> = {
+export const STAGE_LOOK: Record<
+  Stage,
+  { edge: string; ink: string; wash: string; mark: string; word: string }
+> = {
   building: { edge: '#FAF8F3', ink: '#4A5054', wash: '#FAF8F3', mark: '□', word: 'building' },
   dispatched: { edge: '#D9B44A', ink: '#6F5410', wash: '#F7EDD0', mark: '▶', word: 'dispatched' },
   at_processor: { edge: '#A8702E', ink: '#7D4D16', wash: '#F2E4D2', mark: '◆', word: 'at processor' },

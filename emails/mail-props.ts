@@ -74,7 +74,13 @@ export const MAIL_PROPS = {
   }),
   'batch-cancelled': OfBatch.extend({ reason: Words }),
   /** A new link to a batch that is under way. */
-  'batch-link': OfBatch.extend({ stage: z.enum(STAGES), asked: Words, specification: Words, wantedBackOn: Day.nullable(), url: z.url() }),
+  'batch-link': OfBatch.extend({
+    stage: z.enum(STAGES),
+    asked: Words,
+    specification: Words,
+    wantedBackOn: Day.nullable(),
+    url: z.url(),
+  }),
   /** A question, an answer or a note, to either side. */
   message: Message,
   trouble: Message,
@@ -92,7 +98,14 @@ export const MAIL_PROPS = {
     /** What the transfer carries. */
     reference: Words,
   }),
-  invitation: Stated.extend({ organisation: Words, inviter: Words, name: Words, roles: z.array(Words).min(1), url: z.url(), expiresAt: Moment }),
+  invitation: Stated.extend({
+    organisation: Words,
+    inviter: Words,
+    name: Words,
+    roles: z.array(Words).min(1),
+    url: z.url(),
+    expiresAt: Moment,
+  }),
   reset: Stated.extend({ name: Words, url: z.url(), expiresAt: Moment }),
   'sign-in': Stated.extend({ name: Words, url: z.url(), expiresAt: Moment }),
 } as const;

@@ -21,7 +21,13 @@ export function MessageMail(props: Props) {
       preview={`${author}: ${body.slice(0, 100)}`}
       batch={{ number: batchNumber, stage }}
       title={TITLES[kind](author)}
-      foot={to === 'processor' ? <AnswerFoot shop={shop} hasPage={url !== null} /> : `An answer to this mail goes to ${other} as an ordinary mail. Answered on the page, it stays with the batch.`}
+      foot={
+        to === 'processor' ? (
+          <AnswerFoot shop={shop} hasPage={url !== null} />
+        ) : (
+          `An answer to this mail goes to ${other} as an ordinary mail. Answered on the page, it stays with the batch.`
+        )
+      }
     >
       <Say quiet>
         <FromTo {...props} />
@@ -34,11 +40,24 @@ export function MessageMail(props: Props) {
         </>
       )}
       <Quote trouble={kind === 'trouble'}>{body}</Quote>
-      {url && <Actions primary={{ says: kind === 'question' || kind === 'trouble' ? 'Answer on the page' : `Open ${batchNumber}`, url }} />}
+      {url && (
+        <Actions
+          primary={{
+            says: kind === 'question' || kind === 'trouble' ? 'Answer on the page' : `Open ${batchNumber}`,
+            url,
+          }}
+        />
+      )}
     </MailLayout>
   );
 }
 
-const SUBJECTS: Record<Props['kind'], string> = { question: 'a question', answer: 'an answer', note: 'a note', trouble: 'trouble reported' };
+const SUBJECTS: Record<Props['kind'], string> = {
+  question: 'a question',
+  answer: 'an answer',
+  note: 'a note',
+  trouble: 'trouble reported',
+};
 
-export const messageSubject = ({ batchNumber, kind, to, shop, processor }: Props): string => `${batchNumber}: ${SUBJECTS[kind]} from ${to === 'shop' ? processor : shop}`;
+export const messageSubject = ({ batchNumber, kind, to, shop, processor }: Props): string =>
+  `${batchNumber}: ${SUBJECTS[kind]} from ${to === 'shop' ? processor : shop}`;

@@ -19,10 +19,18 @@ export function answerWith(response: ServerResponse, { status, type, body, heade
 }
 
 export function answerJson(response: ServerResponse, status: number, value: unknown): void {
-  answerWith(response, { status, type: 'application/json; charset=utf-8', body: JSON.stringify(value, null, 2) });
+  answerWith(response, {
+    status,
+    type: 'application/json; charset=utf-8',
+    body: JSON.stringify(value, null, 2),
+  });
 }
 
-export function answerHtml(response: ServerResponse, html: string, headers: Record<string, string> = {}): void {
+export function answerHtml(
+  response: ServerResponse,
+  html: string,
+  headers: Record<string, string> = {},
+): void {
   answerWith(response, { status: 200, type: 'text/html; charset=utf-8', body: html, headers });
 }
 

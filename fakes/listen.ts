@@ -12,7 +12,10 @@ export interface Listening {
  *
  * Closing cuts open connections: browsers keep theirs alive, and a stand-in that waits for them would hold up Ctrl-C.
  */
-export function listen(handler: RequestListener, { port, host }: { port: number; host: string }): Promise<Listening> {
+export function listen(
+  handler: RequestListener,
+  { port, host }: { port: number; host: string },
+): Promise<Listening> {
   const server = createServer(handler);
   // A certificate of 50 MB over a slow line takes longer than Node's five minutes would allow.
   server.requestTimeout = 0;

@@ -5,7 +5,17 @@ import { FONT_FACES } from './fonts';
  *
  * They are marked as local on every page, because somebody will one day mistake them for the real thing.
  */
-export function page({ title, heading, body, wide = false }: { title: string; heading: string; body: string; wide?: boolean }): string {
+export function page({
+  title,
+  heading,
+  body,
+  wide = false,
+}: {
+  title: string;
+  heading: string;
+  body: string;
+  wide?: boolean;
+}): string {
   return `<!doctype html>
 <html lang="en">
 <head>
@@ -27,7 +37,13 @@ export function escapeHtml(text: string): string {
   return text.replace(/[&<>"']/g, (sign) => ENTITIES[sign] ?? sign);
 }
 
-const ENTITIES: Readonly<Record<string, string>> = { '&': '&amp;', '<': '&lt;', '>': '&gt;', '"': '&quot;', "'": '&#39;' };
+const ENTITIES: Readonly<Record<string, string>> = {
+  '&': '&amp;',
+  '<': '&lt;',
+  '>': '&gt;',
+  '"': '&quot;',
+  "'": '&#39;',
+};
 
 const STYLE = `${FONT_FACES}
 :root{--paper:#FAF8F3;--bench:#EFEBE1;--rule:#D8D2C4;--line:#7D7768;--ink:#1E2326;--quiet:#565C60;--faint:#6B675C;--halo:#D9B44A;--proved:#26527B;--held:#8E2F20;--field:#FFFFFF}

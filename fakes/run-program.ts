@@ -11,7 +11,10 @@ export function isProgram(moduleUrl: string): boolean {
 }
 
 /** Runs a stand-in as a process: one line when it is up, a clean end on a signal, one sentence and exit code 1 if it cannot start. */
-export async function runProgram(name: string, start: () => Promise<Running & { address: string }>): Promise<void> {
+export async function runProgram(
+  name: string,
+  start: () => Promise<Running & { address: string }>,
+): Promise<void> {
   try {
     const running = await start();
     process.stdout.write(`${name} stands in at ${running.address}\n`);
@@ -37,6 +40,7 @@ export function portFromEnv(name: string, fallback: number): number {
   const value = process.env[name];
   if (value === undefined || value === '') return fallback;
   const port = Number(value);
-  if (!Number.isInteger(port) || port < 0 || port > 65535) throw new Error(`${name} must be a port number, not "${value}".`);
+  if (!Number.isInteger(port) || port < 0 || port > 65535)
+    throw new Error(`${name} must be a port number, not "${value}".`);
   return port;
 }

@@ -67,7 +67,11 @@ interface DayParts {
 
 function partsOf(when: Date | CalendarDay, zone: string): DayParts {
   const [moment, readIn] = typeof when === 'string' ? [new Date(midnightUtc(when)), 'UTC'] : [when, zone];
-  const found = new Map(formatIn(readIn).formatToParts(moment).map((part) => [part.type, part.value]));
+  const found = new Map(
+    formatIn(readIn)
+      .formatToParts(moment)
+      .map((part) => [part.type, part.value]),
+  );
   const text = (type: Intl.DateTimeFormatPartTypes) => found.get(type) ?? '';
   const monthNumber = text('month');
   return {

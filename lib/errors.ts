@@ -29,8 +29,12 @@ export class AppError extends Error {
 }
 
 /** Not yours and not there are the same sentence. */
-export const notFound = (thing: string): AppError => new AppError('not_found', `This ${thing} belongs to another shop, or it does not exist.`);
+export const notFound = (thing: string): AppError =>
+  new AppError('not_found', `This ${thing} belongs to another shop, or it does not exist.`);
 
 /** Somebody else saved first. */
 export const changedMeanwhile = (thing: string): AppError =>
-  new AppError('conflict', `Not saved: the ${thing} was changed meanwhile. Look at what it is now, then save again.`);
+  new AppError(
+    'conflict',
+    `Not saved: the ${thing} was changed meanwhile. Look at what it is now, then save again.`,
+  );

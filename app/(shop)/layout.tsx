@@ -14,7 +14,8 @@ import { getMeEndpoint } from '@/lib/session/endpoints';
 
 export default async function ShopLayout({ children }: { children: ReactNode }) {
   const me = await readOnServer(getMeEndpoint, {});
-  if (me.organisation.kind === 'processor') redirect(me.batchId === null ? '/portal' : `/portal/batches/${me.batchId}`);
+  if (me.organisation.kind === 'processor')
+    redirect(me.batchId === null ? '/portal' : `/portal/batches/${me.batchId}`);
   const kept = await cookies();
   const singleKeys = me.singleKeys && readSingleKeys(kept.get(KEYS_COOKIE)?.value);
   return (
@@ -27,7 +28,14 @@ export default async function ShopLayout({ children }: { children: ReactNode }) 
         singleKeys={singleKeys}
         numberField={<HeadSearch />}
         scan={<PhoneSearch />}
-        personPanel={<PersonPanel look={readLook(kept.get(LOOK_COOKIE)?.value)} singleKeys={singleKeys} accountHref="/settings/account" signOut={signOutHere} />}
+        personPanel={
+          <PersonPanel
+            look={readLook(kept.get(LOOK_COOKIE)?.value)}
+            singleKeys={singleKeys}
+            accountHref="/settings/account"
+            signOut={signOutHere}
+          />
+        }
       >
         {children}
       </ShopShell>

@@ -20,7 +20,8 @@ declare module 'next-auth' {
 }
 
 const text = (value: unknown): string => (typeof value === 'string' ? value : '');
-const addressOf = (request: Request): string => request.headers.get('x-forwarded-for')?.split(',')[0]?.trim() ?? 'local';
+const addressOf = (request: Request): string =>
+  request.headers.get('x-forwarded-for')?.split(',')[0]?.trim() ?? 'local';
 
 /** Too many tries: the seconds to wait travel in the code, because the form's answer and the address carry nothing else. */
 class SignInThrottled extends CredentialsSignin {
@@ -51,7 +52,13 @@ export const { handlers, signIn, signOut } = NextAuth({
       id: 'password',
       credentials: { email: {}, password: {} },
       authorize: async ({ email, password }, request) => {
-        const claims = await throttled(signInWithPassword(primary(), { email: text(email), password: text(password), address: addressOf(request) }));
+        const claims = await throttled(
+          signInWithPassword(primary(), {
+            email: text(email),
+            password: text(password),
+            address: addressOf(request),
+          }),
+        );
         return claims && { id: 'person', claims };
       },
     }),
@@ -76,7 +83,10 @@ export const { handlers, signIn, signOut } = NextAuth({
       id: 'organisation',
       credentials: { membershipId: {} },
       authorize: async ({ membershipId }, request) => {
-        const claims = await chooseOrganisation(primary(), { now: await claimsOf(request.headers), membershipId: text(membershipId) });
+        const claims = await chooseOrganisation(primary(), {
+          now: await claimsOf(request.headers),
+          membershipId: text(membershipId),
+        });
         return claims && { id: 'person', claims };
       },
     }),
@@ -86,7 +96,10 @@ export const { handlers, signIn, signOut } = NextAuth({
     session: ({ session }) => session,
   },
   logger: {
-    error: (error) => (error instanceof CredentialsSignin ? log.info({ reason: error.code }, 'sign-in refused') : log.error({ error }, 'sign-in failed')),
+    error: (error) =>
+      error instanceof CredentialsSignin
+        ? log.info({ reason: error.code }, 'sign-in refused')
+        : log.error({ error }, 'sign-in failed'),
     warn: (code) => log.warn({ code }, 'sign-in'),
     debug: () => undefined,
   },

@@ -19,16 +19,27 @@ interface KeyedRequest {
  */
 export async function once(tx: Tx, request: KeyedRequest, work: () => Promise<unknown>): Promise<unknown> {
   if (request.owner === '') return work();
-  if (request.key.length > 200) throw new AppError('bad_input', 'The idempotency key is longer than 200 characters.');
+  if (request.key.length > 200)
+    throw new AppError('bad_input', 'The idempotency key is longer than 200 characters.');
   const [mine] = await tx
     .insert(idempotencyKeys)
-    .values({ owner: request.owner, key: request.key, operation: request.operation, requestHash: request.requestHash, createdAt: request.now })
+    .values({
+      owner: request.owner,
+      key: request.key,
+      operation: request.operation,
+      requestHash: request.requestHash,
+      createdAt: request.now,
+    })
     .onConflictDoNothing()
     .returning({ id: idempotencyKeys.id });
   if (!mine) return earlierAnswer(tx, request);
 
   const result = await work();
-  if (!(result instanceof Response)) await tx.update(idempotencyKeys).set({ status: 200, response: result }).where(eq(idempotencyKeys.id, mine.id));
+  if (!(result instanceof Response))
+    await tx
+      .update(idempotencyKeys)
+      .set({ status: 200, response: result })
+      .where(eq(idempotencyKeys.id, mine.id));
   return result;
 }
 
@@ -41,6 +52,7 @@ async function earlierAnswer(tx: Tx, request: KeyedRequest): Promise<unknown> {
     throw new AppError('conflict', 'This key was used for another request. Use a new key for a new request.');
   }
   // A file, or a secret that is shown once, is not kept to be told again.
-  if (earlier.status === null) throw new AppError('conflict', 'This was done already. Its answer is shown only once and is not kept.');
+  if (earlier.status === null)
+    throw new AppError('conflict', 'This was done already. Its answer is shown only once and is not kept.');
   return earlier.response;
 }

@@ -20,7 +20,10 @@ export const viewer = cache(async (): Promise<Identity> => identify(await header
 type Asked = readonly [Endpoint, Record<string, unknown>];
 
 /** One read and what it is asked, checked against each other. */
-export const ask = <D extends Declaration>(endpoint: Endpoint<D>, input: InputOf<D>): Asked => [endpoint as unknown as Endpoint, input as Record<string, unknown>];
+export const ask = <D extends Declaration>(endpoint: Endpoint<D>, input: InputOf<D>): Asked => [
+  endpoint as unknown as Endpoint,
+  input as Record<string, unknown>,
+];
 
 /**
  * Lays a page's data into the browser's cache before it is drawn, so that no page starts with waiting. A person who is
@@ -34,7 +37,10 @@ export async function Prefetched({ queries, children }: { queries: readonly Aske
 }
 
 /** One read on the server, for what a page's own frame needs (its title, a redirect). */
-export async function readOnServer<D extends Declaration>(endpoint: Endpoint<D>, input: InputOf<D>): Promise<OutputOf<D>> {
+export async function readOnServer<D extends Declaration>(
+  endpoint: Endpoint<D>,
+  input: InputOf<D>,
+): Promise<OutputOf<D>> {
   const [result] = await readAll([ask(endpoint, input)]);
   return result?.data as OutputOf<D>;
 }

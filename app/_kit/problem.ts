@@ -23,7 +23,13 @@ export function toProblem(error: unknown, requestId: string): Problem {
   const refusal = asRefusal(error);
   if (!refusal) {
     log.error({ error, requestId }, 'a request failed');
-    return { type: 'about:blank', title: `This did not work, and that is our fault. Nothing was changed. Request ${requestId}.`, status: 500, code: 'bug', requestId };
+    return {
+      type: 'about:blank',
+      title: `This did not work, and that is our fault. Nothing was changed. Request ${requestId}.`,
+      status: 500,
+      code: 'bug',
+      requestId,
+    };
   }
   const { fields, extra } = refusal.details;
   return {
@@ -41,7 +47,11 @@ export function problemResponse(error: unknown, requestId: string): Response {
   const problem = toProblem(error, requestId);
   return Response.json(problem, {
     status: problem.status,
-    headers: { 'content-type': 'application/problem+json', 'x-request-id': requestId, ...(problem.status === 503 ? { 'retry-after': '2' } : {}) },
+    headers: {
+      'content-type': 'application/problem+json',
+      'x-request-id': requestId,
+      ...(problem.status === 503 ? { 'retry-after': '2' } : {}),
+    },
   });
 }
 
@@ -54,13 +64,21 @@ function asRefusal(error: unknown): AppError | null {
   }
   const cause = error instanceof DrizzleQueryError ? error.cause : error;
   if (cause instanceof DatabaseError) return fromDatabase(cause);
-  if (isLostConnection(cause)) return new AppError('unavailable', 'The database does not answer just now. Nothing was changed. Try again in a moment.');
+  if (isLostConnection(cause))
+    return new AppError(
+      'unavailable',
+      'The database does not answer just now. Nothing was changed. Try again in a moment.',
+    );
   return null;
 }
 
 /** Refusals of the database that a race can bring about although the verb looked first. */
 function fromDatabase(error: DatabaseError): AppError | null {
-  if (error.constraint === 'never_negative') return new AppError('conflict', 'Those pieces are not there any more. Look again, then enter what there is.');
+  if (error.constraint === 'never_negative')
+    return new AppError(
+      'conflict',
+      'Those pieces are not there any more. Look again, then enter what there is.',
+    );
   switch (error.code) {
     case '23505':
       return new AppError('conflict', 'This exists already. Look again before you add it once more.');
@@ -73,7 +91,10 @@ function fromDatabase(error: DatabaseError): AppError | null {
     case '08006':
     case '08003':
     case '53300':
-      return new AppError('unavailable', 'The database does not answer just now. Nothing was changed. Try again in a moment.');
+      return new AppError(
+        'unavailable',
+        'The database does not answer just now. Nothing was changed. Try again in a moment.',
+      );
     default:
       return null;
   }
@@ -82,5 +103,10 @@ function fromDatabase(error: DatabaseError): AppError | null {
 function isLostConnection(error: unknown): boolean {
   if (!(error instanceof Error)) return false;
   const code = 'code' in error ? String(error.code) : '';
-  return ['ECONNREFUSED', 'ECONNRESET', 'EPIPE', 'ETIMEDOUT'].includes(code) || /Connection terminated|timeout exceeded when trying to connect|Client has encountered a connection error/.test(error.message);
+  return (
+    ['ECONNREFUSED', 'ECONNRESET', 'EPIPE', 'ETIMEDOUT'].includes(code) ||
+    /Connection terminated|timeout exceeded when trying to connect|Client has encountered a connection error/.test(
+      error.message,
+    )
+  );
 }

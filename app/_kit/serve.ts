@@ -17,7 +17,10 @@ import { identify } from './session';
 
 const LARGEST_BODY = 1_000_000;
 
-type RouteHandler = (request: Request, route: { params: Promise<Record<string, string>> }) => Promise<Response>;
+type RouteHandler = (
+  request: Request,
+  route: { params: Promise<Record<string, string>> },
+) => Promise<Response>;
 
 /**
  * Turns an endpoint into a route: who, may they, is the input right, in whose rows, done once, told in one form.
@@ -29,17 +32,38 @@ export function serve(endpoint: Endpoint): RouteHandler {
     const startedAt = performance.now();
     try {
       const response = await answer(endpoint, request, await route.params, requestId);
-      log.info({ requestId, operation: endpoint.declaration.id, status: response.status, ms: Math.round(performance.now() - startedAt) }, 'answered');
+      log.info(
+        {
+          requestId,
+          operation: endpoint.declaration.id,
+          status: response.status,
+          ms: Math.round(performance.now() - startedAt),
+        },
+        'answered',
+      );
       return response;
     } catch (error) {
       const response = problemResponse(error, requestId);
-      log.info({ requestId, operation: endpoint.declaration.id, status: response.status, ms: Math.round(performance.now() - startedAt) }, 'refused');
+      log.info(
+        {
+          requestId,
+          operation: endpoint.declaration.id,
+          status: response.status,
+          ms: Math.round(performance.now() - startedAt),
+        },
+        'refused',
+      );
       return response;
     }
   };
 }
 
-async function answer(endpoint: Endpoint, request: Request, params: Record<string, string>, requestId: string): Promise<Response> {
+async function answer(
+  endpoint: Endpoint,
+  request: Request,
+  params: Record<string, string>,
+  requestId: string,
+): Promise<Response> {
   const { declaration } = endpoint;
   const now = new Date();
   const isRead = declaration.method === 'get';
@@ -54,33 +78,50 @@ async function answer(endpoint: Endpoint, request: Request, params: Record<strin
 
   const owner = keyOwnerOf(identity);
   const inTenant = <T>(work: (ctx: Ctx) => Promise<T>): Promise<T> =>
-    withTenant(isRead ? replica() : primary(), identity.tenant, (tx) => work({ tenant: identity.tenant, actor: identity.actor, tx, now, requestId, address }), owner);
+    withTenant(
+      isRead ? replica() : primary(),
+      identity.tenant,
+      (tx) => work({ tenant: identity.tenant, actor: identity.actor, tx, now, requestId, address }),
+      owner,
+    );
 
   const found = await endpoint.outside?.({ inTenant }, input);
   const work = async (ctx: Ctx): Promise<unknown> => {
     const result = await endpoint.run(ctx, input, found);
     return result instanceof Response ? result : declaration.response.parse(result);
   };
-  const result = await inTenant((ctx) => (key === null ? work(ctx) : once(ctx.tx, { owner, key, operation: declaration.id, requestHash: hashOf(input), now }, () => work(ctx))));
+  const result = await inTenant((ctx) =>
+    key === null
+      ? work(ctx)
+      : once(ctx.tx, { owner, key, operation: declaration.id, requestHash: hashOf(input), now }, () =>
+          work(ctx),
+        ),
+  );
   if (result instanceof Response) return result;
   return Response.json(result, { headers: { 'x-request-id': requestId, 'cache-control': 'no-store' } });
 }
 
 /** What is for everyone is done at the door, whoever comes: a signed-in person may open a link that was sent to another. */
-const atItsSide = (identity: Identity, { declaration }: Endpoint): Identity => (declaration.side === 'public' ? { ...identity, tenant: { kind: 'door' } } : identity);
+const atItsSide = (identity: Identity, { declaration }: Endpoint): Identity =>
+  declaration.side === 'public' ? { ...identity, tenant: { kind: 'door' } } : identity;
 
 /** The permission first, then the side: a processor at a shop's door is told the same as any stranger. */
 function standBefore(identity: Identity, { declaration }: Endpoint): void {
   authorize(identity, declaration.permission);
   const side = identity.tenant.kind;
-  const fits = declaration.side === 'public' || (declaration.side === 'any' && side !== 'door') || (declaration.side === 'shop' && side === 'shop') || (declaration.side === 'portal' && side === 'processor');
+  const fits =
+    declaration.side === 'public' ||
+    (declaration.side === 'any' && side !== 'door') ||
+    (declaration.side === 'shop' && side === 'shop') ||
+    (declaration.side === 'portal' && side === 'processor');
   if (!fits) throw new AppError('not_allowed', 'This belongs to another side of Lotwright.');
 }
 
 /** Cookies come along with a form on a foreign page; its Origin does not lie. Programs with a token send none. */
 function refuseForeignOrigin(request: Request): void {
   const origin = request.headers.get('origin');
-  if (origin !== null && origin !== new URL(env.APP_URL).origin) throw new AppError('not_allowed', 'This came from a page that is not Lotwright.');
+  if (origin !== null && origin !== new URL(env.APP_URL).origin)
+    throw new AppError('not_allowed', 'This came from a page that is not Lotwright.');
 }
 
 function queryOf(request: Request): Record<string, unknown> {
@@ -99,7 +140,8 @@ async function bodyOf(request: Request): Promise<Record<string, unknown>> {
   if (text === '') return {};
   try {
     const body: unknown = JSON.parse(text);
-    if (body !== null && typeof body === 'object' && !Array.isArray(body)) return body as Record<string, unknown>;
+    if (body !== null && typeof body === 'object' && !Array.isArray(body))
+      return body as Record<string, unknown>;
   } catch {
     // Told below, in the same words as any body of the wrong shape.
   }
@@ -114,4 +156,5 @@ function keyOwnerOf({ actor, tenant }: Identity): string {
 }
 
 /** Keyed, because some inputs hold a password, which a plain hash in the database would give away to guessing. */
-const hashOf = (input: unknown): string => createHmac('sha256', env.AUTH_SECRET).update(JSON.stringify(input)).digest('hex');
+const hashOf = (input: unknown): string =>
+  createHmac('sha256', env.AUTH_SECRET).update(JSON.stringify(input)).digest('hex');

@@ -17,7 +17,10 @@ export function ApiDocs({ operations, holders, address }: ApiDocsProps) {
   const tags = [...new Set(operations.map((operation) => operation.tag))].sort();
   return (
     <>
-      <PageHead title="For programs" sub={`${operations.length} reads and writes. The screens use these and no others.`} />
+      <PageHead
+        title="For programs"
+        sub={`${operations.length} reads and writes. The screens use these and no others.`}
+      />
       <div className="flex flex-col gap-7">
         <Preface address={address} />
         <nav aria-label="Kinds of things" className="flex flex-wrap gap-x-5 gap-y-1">
@@ -28,11 +31,20 @@ export function ApiDocs({ operations, holders, address }: ApiDocsProps) {
           ))}
         </nav>
         {tags.map((tag) => (
-          <Section key={tag} id={tag} title={tag} note={`${operations.filter((operation) => operation.tag === tag).length}`}>
+          <Section
+            key={tag}
+            id={tag}
+            title={tag}
+            note={`${operations.filter((operation) => operation.tag === tag).length}`}
+          >
             {operations
               .filter((operation) => operation.tag === tag)
               .map((operation) => (
-                <Operation key={operation.id} operation={operation} holders={holders[operation.permission] ?? ''} />
+                <Operation
+                  key={operation.id}
+                  operation={operation}
+                  holders={holders[operation.permission] ?? ''}
+                />
               ))}
           </Section>
         ))}
@@ -41,7 +53,12 @@ export function ApiDocs({ operations, holders, address }: ApiDocsProps) {
   );
 }
 
-const SIDES: Record<string, string> = { shop: '', portal: 'the processor’s side', any: 'either side', public: 'without sign-in where nobody is named' };
+const SIDES: Record<string, string> = {
+  shop: '',
+  portal: 'the processor’s side',
+  any: 'either side',
+  public: 'without sign-in where nobody is named',
+};
 
 function Operation({ operation, holders }: { operation: ReadableOperation; holders: string }) {
   const { id, method, path, summary, side, permission, input, output } = operation;
@@ -54,7 +71,9 @@ function Operation({ operation, holders }: { operation: ReadableOperation; holde
       </summary>
       <div className="flex flex-col gap-4 pt-1 pb-5 md:pl-[4.25rem]">
         <p className="text-second">
-          Permission <strong className="num">{permission}</strong> <span className="text-quiet">{holders}</span> {SIDES[side]} <span className="text-quiet">operation</span> <span className="num">{id}</span>
+          Permission <strong className="num">{permission}</strong>{' '}
+          <span className="text-quiet">{holders}</span> {SIDES[side]}{' '}
+          <span className="text-quiet">operation</span> <span className="num">{id}</span>
         </p>
         <Fields label="Goes in" fields={input} path={path} />
         <Fields label="Comes out" fields={output} path={path} />
@@ -76,7 +95,13 @@ function Fields({ label, fields, path }: { label: string; fields: readonly Reada
             <span className="break-words">{field.kind}</span>
           </Cell>
           <Cell head="Limits" quiet>
-            {[path.includes(`{${field.name}}`) ? 'in the path' : '', field.required ? '' : 'may be left out', field.limits].filter(Boolean).join(', ')}
+            {[
+              path.includes(`{${field.name}}`) ? 'in the path' : '',
+              field.required ? '' : 'may be left out',
+              field.limits,
+            ]
+              .filter(Boolean)
+              .join(', ')}
           </Cell>
         </Row>
       ))}

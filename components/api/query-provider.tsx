@@ -12,7 +12,8 @@ export function QueryProvider({ children }: { children: ReactNode }) {
         defaultOptions: {
           queries: {
             staleTime: 10_000,
-            retry: (count, error) => count < 3 && (!(error instanceof ApiError) || [0, 503].includes(error.problem.status)),
+            retry: (count, error) =>
+              count < 3 && (!(error instanceof ApiError) || [0, 503].includes(error.problem.status)),
           },
         },
       }),

@@ -1,5 +1,12 @@
 'use client';
-import { useInfiniteQuery, useMutation, useQuery, useQueryClient, useSuspenseQuery, type UseMutationResult } from '@tanstack/react-query';
+import {
+  useInfiniteQuery,
+  useMutation,
+  useQuery,
+  useQueryClient,
+  useSuspenseQuery,
+  type UseMutationResult,
+} from '@tanstack/react-query';
 import { useRef } from 'react';
 
 import { ApiError, call } from '@/lib/api/client';
@@ -17,8 +24,16 @@ export function useRead<D extends Declaration>(declaration: D, input: InputOf<D>
 }
 
 /** A read that starts in the browser: search as one types, a detail that opens. */
-export function useLazyRead<D extends Declaration>(declaration: D, input: InputOf<D>, options: { enabled?: boolean; refreshEveryMs?: number } = {}) {
-  return useQuery<OutputOf<D>>({ ...optionsOf(declaration, input), enabled: options.enabled ?? true, refetchInterval: options.refreshEveryMs ?? false });
+export function useLazyRead<D extends Declaration>(
+  declaration: D,
+  input: InputOf<D>,
+  options: { enabled?: boolean; refreshEveryMs?: number } = {},
+) {
+  return useQuery<OutputOf<D>>({
+    ...optionsOf(declaration, input),
+    enabled: options.enabled ?? true,
+    refetchInterval: options.refreshEveryMs ?? false,
+  });
 }
 
 /** A list that loads further pages by key. The first page is the prefetched one. */
@@ -28,8 +43,18 @@ export function usePages<D extends Declaration>(declaration: D, input: InputOf<D
   const first = cache.getQueryState<OutputOf<D> & { next: string | null }>(firstKey);
   return useInfiniteQuery({
     queryKey: [...firstKey, 'pages'],
-    ...(first?.data ? { initialData: { pages: [first.data], pageParams: [null] }, initialDataUpdatedAt: first.dataUpdatedAt } : {}),
-    queryFn: ({ pageParam, signal }) => call(declaration, { ...(input as object), ...(pageParam === null ? {} : { after: pageParam }) } as InputOf<D>, { signal }) as Promise<OutputOf<D> & { next: string | null }>,
+    ...(first?.data
+      ? {
+          initialData: { pages: [first.data], pageParams: [null] },
+          initialDataUpdatedAt: first.dataUpdatedAt,
+        }
+      : {}),
+    queryFn: ({ pageParam, signal }) =>
+      call(
+        declaration,
+        { ...(input as object), ...(pageParam === null ? {} : { after: pageParam }) } as InputOf<D>,
+        { signal },
+      ) as Promise<OutputOf<D> & { next: string | null }>,
     initialPageParam: null as string | null,
     getNextPageParam: (page: { next: string | null }) => page.next,
   });
@@ -39,7 +64,10 @@ export function usePages<D extends Declaration>(declaration: D, input: InputOf<D
  * A write. Afterwards the named reads are fetched again. The same press keeps its key when it is tried again after a
  * lost answer; a new press gets a new one.
  */
-export function useWrite<D extends Declaration>(declaration: D, options: { refreshes?: readonly Declaration[] } = {}): UseMutationResult<OutputOf<D>, ApiError, InputOf<D>> {
+export function useWrite<D extends Declaration>(
+  declaration: D,
+  options: { refreshes?: readonly Declaration[] } = {},
+): UseMutationResult<OutputOf<D>, ApiError, InputOf<D>> {
   const cache = useQueryClient();
   const key = useRef('');
   return useMutation<OutputOf<D>, ApiError, InputOf<D>>({
@@ -47,8 +75,10 @@ export function useWrite<D extends Declaration>(declaration: D, options: { refre
       key.current = crypto.randomUUID();
     },
     mutationFn: (input) => call(declaration, input, { key: key.current }),
-    retry: (count, error) => count < 3 && error instanceof ApiError && [0, 503].includes(error.problem.status),
+    retry: (count, error) =>
+      count < 3 && error instanceof ApiError && [0, 503].includes(error.problem.status),
     retryDelay: (count) => 400 * 2 ** count,
-    onSuccess: () => Promise.all((options.refreshes ?? []).map((read) => cache.invalidateQueries({ queryKey: [read.id] }))),
+    onSuccess: () =>
+      Promise.all((options.refreshes ?? []).map((read) => cache.invalidateQueries({ queryKey: [read.id] }))),
   });
 }

@@ -16,7 +16,13 @@ import { RestOnBatch } from './rest-of';
 
 type Closed = '0' | '1';
 
-const COLUMNS = [{ says: 'Assembly' }, { says: 'Needed' }, { says: 'Ready of needed' }, { says: 'Pieces', right: true }, { says: 'Where the rest is' }];
+const COLUMNS = [
+  { says: 'Assembly' },
+  { says: 'Needed' },
+  { says: 'Ready of needed' },
+  { says: 'Pieces', right: true },
+  { says: 'Where the rest is' },
+];
 const MOST_BATCHES = 3;
 
 /** What is built, earliest need first, and how far each is. */
@@ -46,7 +52,10 @@ export function AssembliesScreen({ closed }: { closed: Closed }) {
       />
       {data.rows.length === 0 && <NoAssemblies closed={closed} may={may} />}
       {data.rows.length > 0 && (
-        <Table label={closed === '1' ? 'Closed assemblies' : 'Open assemblies'} columns={closed === '1' ? CLOSED_COLUMNS : COLUMNS}>
+        <Table
+          label={closed === '1' ? 'Closed assemblies' : 'Open assemblies'}
+          columns={closed === '1' ? CLOSED_COLUMNS : COLUMNS}
+        >
           {data.rows.map((row) => (
             <AssemblyLine key={row.id} row={row} />
           ))}
@@ -56,11 +65,25 @@ export function AssembliesScreen({ closed }: { closed: Closed }) {
   );
 }
 
-const CLOSED_COLUMNS = COLUMNS.map((column) => (column.says === 'Where the rest is' ? { says: 'Closed' } : column));
+const CLOSED_COLUMNS = COLUMNS.map((column) =>
+  column.says === 'Where the rest is' ? { says: 'Closed' } : column,
+);
 
 function NoAssemblies({ closed, may }: { closed: Closed; may: boolean }) {
-  if (closed === '1') return <Empty says="No assembly is closed yet." comes="One that is built, or not wanted any more, is closed on its page." />;
-  return <Empty says="No assembly is open." comes="Enter one with the parts it needs; then this list says what it waits for." action={may && <Link href="/assemblies/new">Add an assembly</Link>} />;
+  if (closed === '1')
+    return (
+      <Empty
+        says="No assembly is closed yet."
+        comes="One that is built, or not wanted any more, is closed on its page."
+      />
+    );
+  return (
+    <Empty
+      says="No assembly is open."
+      comes="Enter one with the parts it needs; then this list says what it waits for."
+      action={may && <Link href="/assemblies/new">Add an assembly</Link>}
+    />
+  );
 }
 
 function AssemblyLine({ row }: { row: AssemblyRow }) {
@@ -76,11 +99,24 @@ function AssemblyLine({ row }: { row: AssemblyRow }) {
       <Cell head="Needed" className="whitespace-nowrap">
         {row.neededOn && (
           <>
-            <Day day={row.neededOn} clock={clock} /> {row.closedAt === null && row.ready < row.needed && <Until day={row.neededOn} clock={clock} />}
+            <Day day={row.neededOn} clock={clock} />{' '}
+            {row.closedAt === null && row.ready < row.needed && <Until day={row.neededOn} clock={clock} />}
           </>
         )}
       </Cell>
-      <Cell>{row.needed > 0 && <SteelRule small to={row.needed} tick={tick} number={tick * 5} value={row.ready} width={150} says={`${row.ready} of ${row.needed} pieces ready`} />}</Cell>
+      <Cell>
+        {row.needed > 0 && (
+          <SteelRule
+            small
+            to={row.needed}
+            tick={tick}
+            number={tick * 5}
+            value={row.ready}
+            width={150}
+            says={`${row.ready} of ${row.needed} pieces ready`}
+          />
+        )}
+      </Cell>
       <Cell figure head="Pieces">
         {row.needed > 0 ? `${row.ready} of ${row.needed}` : ''}
       </Cell>
@@ -94,7 +130,8 @@ function AssemblyLine({ row }: { row: AssemblyRow }) {
 function Rest({ row }: { row: AssemblyRow }) {
   const clock = useClock();
   if (row.needed === 0) return <span className="text-quiet">No parts are entered yet.</span>;
-  if (row.ready >= row.needed) return <span className="text-proved-ink">All it needs is fitted or in stock.</span>;
+  if (row.ready >= row.needed)
+    return <span className="text-proved-ink">All it needs is fitted or in stock.</span>;
   if (row.batches.length === 0) return <span className="text-quiet">Nothing of it is on a batch.</span>;
   const more = row.batches.length - MOST_BATCHES;
   return (

@@ -18,7 +18,15 @@ import type { OutputOf } from '@/lib/api/endpoint';
 import { createAssembly, getAssembly, listAssemblies, updateAssembly } from '@/lib/assemblies/contract';
 import { dayWords } from '@/lib/day-words';
 
-import { AssemblyFields, atFormRow, fieldsOf, NEW_ASSEMBLY, sentOf, type AssemblyFieldsIn, type AssemblyFieldsOut } from './assembly-fields';
+import {
+  AssemblyFields,
+  atFormRow,
+  fieldsOf,
+  NEW_ASSEMBLY,
+  sentOf,
+  type AssemblyFieldsIn,
+  type AssemblyFieldsOut,
+} from './assembly-fields';
 import { NeedRow } from './need-row';
 
 type Assembly = OutputOf<typeof getAssembly>;
@@ -30,7 +38,10 @@ export function AssemblyForm({ assembly }: { assembly?: Assembly }) {
   const [seen, setSeen] = useState(assembly);
   /** What somebody else saved while this was being typed. */
   const [theirs, setTheirs] = useState<Assembly | null>(null);
-  const form = useForm<AssemblyFieldsIn, unknown, AssemblyFieldsOut>({ resolver: zodResolver(AssemblyFields), defaultValues: assembly ? fieldsOf(assembly) : NEW_ASSEMBLY });
+  const form = useForm<AssemblyFieldsIn, unknown, AssemblyFieldsOut>({
+    resolver: zodResolver(AssemblyFields),
+    defaultValues: assembly ? fieldsOf(assembly) : NEW_ASSEMBLY,
+  });
   const rows = useFieldArray({ control: form.control, name: 'needs' });
   const create = useWrite(createAssembly, { refreshes: [listAssemblies] });
   const update = useWrite(updateAssembly, { refreshes: [listAssemblies, getAssembly] });
@@ -53,15 +64,25 @@ export function AssemblyForm({ assembly }: { assembly?: Assembly }) {
   };
   const refuse = async ({ problem }: ApiError, typed: AssemblyFieldsOut) => {
     const { fields = [] } = problem;
-    fields.forEach(({ field, message }, at) => form.setError(atFormRow(field, typed) as 'name', { type: 'server', message }, { shouldFocus: at === 0 }));
+    fields.forEach(({ field, message }, at) =>
+      form.setError(
+        atFormRow(field, typed) as 'name',
+        { type: 'server', message },
+        { shouldFocus: at === 0 },
+      ),
+    );
     if (fields.length > 0) return;
-    const now = seen && problem.code === 'conflict' ? await call(getAssembly, { assemblyId: seen.id }).catch(() => null) : null;
+    const now =
+      seen && problem.code === 'conflict'
+        ? await call(getAssembly, { assemblyId: seen.id }).catch(() => null)
+        : null;
     if (now && now.version !== seen?.version) setTheirs(now);
     else form.setError('root', { type: 'server', message: problem.title });
   };
 
   const title = assembly ? `Change ${assembly.name}` : 'Add an assembly';
-  const fittedOf = (partNumber: string) => seen?.needs.find((need) => need.partNumber === partNumber)?.fitted ?? 0;
+  const fittedOf = (partNumber: string) =>
+    seen?.needs.find((need) => need.partNumber === partNumber)?.fitted ?? 0;
   return (
     <FormProvider {...form}>
       <PageHead title={title} />
@@ -81,12 +102,29 @@ export function AssemblyForm({ assembly }: { assembly?: Assembly }) {
           />
         )}
         <div className="grid grid-cols-1 gap-x-4 gap-y-3 pb-5 sm:grid-cols-2">
-          <TextField label="Name" autoComplete="off" hint="As the yard calls it: Left float 17" error={errors.name?.message} {...form.register('name')} />
-          <DateField label="Needed on" hint={/^\d{4}-\d{2}-\d{2}$/.test(needed) ? dayWords(needed, clock) : 'May stay empty'} error={errors.neededOn?.message} {...form.register('neededOn')} />
-          <TextArea label="Note" rows={2} className="sm:col-span-2" error={errors.note?.message} {...form.register('note')} />
+          <TextField
+            label="Name"
+            autoComplete="off"
+            hint="As the yard calls it: Left float 17"
+            error={errors.name?.message}
+            {...form.register('name')}
+          />
+          <DateField
+            label="Needed on"
+            hint={/^\d{4}-\d{2}-\d{2}$/.test(needed) ? dayWords(needed, clock) : 'May stay empty'}
+            error={errors.neededOn?.message}
+            {...form.register('neededOn')}
+          />
+          <TextArea
+            label="Note"
+            rows={2}
+            className="sm:col-span-2"
+            error={errors.note?.message}
+            {...form.register('note')}
+          />
         </div>
         <Section title="What it needs" note="part numbers in any revision; the drawing says which fits">
-          {errors.needs?.root?.message ?? errors.needs?.message ? (
+          {(errors.needs?.root?.message ?? errors.needs?.message) ? (
             <p role="alert" className="py-2 font-medium text-held-ink">
               {errors.needs?.root?.message ?? errors.needs?.message}
             </p>
@@ -105,7 +143,14 @@ export function AssemblyForm({ assembly }: { assembly?: Assembly }) {
           </ul>
         </Section>
         <div className="flex flex-wrap items-center gap-x-4 gap-y-2 pt-5">
-          <Button look="primary" size="big" type="submit" busy={create.isPending || update.isPending} busyLabel="Saving" notNow={theirs !== null && 'Choose above which of the two is right.'}>
+          <Button
+            look="primary"
+            size="big"
+            type="submit"
+            busy={create.isPending || update.isPending}
+            busyLabel="Saving"
+            notNow={theirs !== null && 'Choose above which of the two is right.'}
+          >
             {assembly ? 'Save the changes' : 'Add the assembly'}
           </Button>
           <ButtonLink size="big" href={assembly ? `/assemblies/${assembly.id}` : '/assemblies'}>

@@ -23,14 +23,25 @@ import { readyOf } from './rest-words';
 
 type Assembly = OutputOf<typeof getAssembly>;
 
-const COLUMNS = [{ says: 'Part' }, { says: 'Needed', right: true }, { says: 'Fitted', right: true }, { says: 'In stock', right: true }, { says: 'Ready' }, { says: 'Where the rest is' }, { says: 'What can be done', hidden: true }];
+const COLUMNS = [
+  { says: 'Part' },
+  { says: 'Needed', right: true },
+  { says: 'Fitted', right: true },
+  { says: 'In stock', right: true },
+  { says: 'Ready' },
+  { says: 'Where the rest is' },
+  { says: 'What can be done', hidden: true },
+];
 
 /** One assembly, part by part: fitted, in stock, and where the rest is until when. */
 export function AssemblyScreen({ assemblyId }: { assemblyId: string }) {
   const { data } = useRead(getAssembly, { assemblyId });
   const mayEdit = useMay('assembly.edit');
   const clock = useClock();
-  const [needed, ready] = [data.needs.reduce((sum, need) => sum + need.pieces, 0), data.needs.reduce((sum, need) => sum + readyOf(need), 0)];
+  const [needed, ready] = [
+    data.needs.reduce((sum, need) => sum + need.pieces, 0),
+    data.needs.reduce((sum, need) => sum + readyOf(need), 0),
+  ];
   const fitted = data.needs.reduce((sum, need) => sum + need.fitted, 0);
   const tick = Math.max(1, Math.ceil(needed / 20));
   const cells = [
@@ -40,7 +51,8 @@ export function AssemblyScreen({ assemblyId }: { assemblyId: string }) {
             caption: 'Needed',
             value: (
               <>
-                <Day day={data.neededOn} clock={clock} /> {!data.closed && ready < needed && <Until day={data.neededOn} clock={clock} />}
+                <Day day={data.neededOn} clock={clock} />{' '}
+                {!data.closed && ready < needed && <Until day={data.neededOn} clock={clock} />}
               </>
             ),
           },
@@ -70,12 +82,40 @@ export function AssemblyScreen({ assemblyId }: { assemblyId: string }) {
       />
       {needed > 0 && (
         <div className="pb-4">
-          <SteelRule to={needed} tick={tick} number={tick * 5} value={ready} width={620} tone="stocked" says={`${ready} of ${needed} pieces ready`} />
+          <SteelRule
+            to={needed}
+            tick={tick}
+            number={tick * 5}
+            value={ready}
+            width={620}
+            tone="stocked"
+            says={`${ready} of ${needed} pieces ready`}
+          />
         </div>
       )}
       <div className="flex flex-col gap-6">
-        <Section title="What it needs" note={data.needs.length > 0 ? `${data.needs.length} ${data.needs.length === 1 ? 'part' : 'parts'}` : undefined}>
-          {data.needs.length === 0 && <Empty says="No parts are entered yet." comes="Enter the part numbers and how many of each." action={mayEdit && !data.closed && <ButtonLink look="word" href={`/assemblies/${assemblyId}/edit`}>Enter them</ButtonLink>} />}
+        <Section
+          title="What it needs"
+          note={
+            data.needs.length > 0
+              ? `${data.needs.length} ${data.needs.length === 1 ? 'part' : 'parts'}`
+              : undefined
+          }
+        >
+          {data.needs.length === 0 && (
+            <Empty
+              says="No parts are entered yet."
+              comes="Enter the part numbers and how many of each."
+              action={
+                mayEdit &&
+                !data.closed && (
+                  <ButtonLink look="word" href={`/assemblies/${assemblyId}/edit`}>
+                    Enter them
+                  </ButtonLink>
+                )
+              }
+            />
+          )}
           {data.needs.length > 0 && (
             <Table label={`What ${data.name} needs`} columns={COLUMNS}>
               {data.needs.map((need) => (
@@ -83,9 +123,15 @@ export function AssemblyScreen({ assemblyId }: { assemblyId: string }) {
               ))}
               <Row state="sum">
                 <Cell>All parts</Cell>
-                <Cell figure head="Needed">{needed}</Cell>
-                <Cell figure head="Fitted">{fitted}</Cell>
-                <Cell figure head="In stock">{data.needs.reduce((sum, need) => sum + need.inStock, 0)}</Cell>
+                <Cell figure head="Needed">
+                  {needed}
+                </Cell>
+                <Cell figure head="Fitted">
+                  {fitted}
+                </Cell>
+                <Cell figure head="In stock">
+                  {data.needs.reduce((sum, need) => sum + need.inStock, 0)}
+                </Cell>
                 <Cell>
                   {ready} of {needed}
                 </Cell>

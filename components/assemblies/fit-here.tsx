@@ -15,7 +15,10 @@ interface FitHereProps {
 
 /** Pieces of one lot in one place, to be fitted to this assembly. */
 export function FitHere({ spot, assemblyId }: FitHereProps) {
-  const { data, error, isPending } = useLazyRead(getStockSpot, { lotId: spot.lotId, locationId: spot.locationId });
+  const { data, error, isPending } = useLazyRead(getStockSpot, {
+    lotId: spot.lotId,
+    locationId: spot.locationId,
+  });
   return (
     <div className="border-b border-rule py-2">
       <p className="pb-2">
@@ -26,7 +29,16 @@ export function FitHere({ spot, assemblyId }: FitHereProps) {
       </p>
       {isPending && <Loading rows={1} label={`Loading ${spot.lotNumber}`} />}
       {error && <Failing says={`${spot.lotNumber} could not be read.`} again={error.message} />}
-      {data && <FitForm key={`${data.pieces} ${data.needs.map((need) => need.open).join()}`} lotId={spot.lotId} lotNumber={spot.lotNumber} locationId={spot.locationId} spot={data} onlyTo={assemblyId} />}
+      {data && (
+        <FitForm
+          key={`${data.pieces} ${data.needs.map((need) => need.open).join()}`}
+          lotId={spot.lotId}
+          lotNumber={spot.lotNumber}
+          locationId={spot.locationId}
+          spot={data}
+          onlyTo={assemblyId}
+        />
+      )}
     </div>
   );
 }

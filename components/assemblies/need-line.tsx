@@ -39,7 +39,9 @@ export function NeedLine({ need, assembly, span }: NeedLineProps) {
           ) : (
             <span className="num font-semibold [overflow-wrap:anywhere]">{need.partNumber}</span>
           )}{' '}
-          <span className="font-cond">{need.partName ?? <span className="text-dispatched-ink">no part has this number</span>}</span>
+          <span className="font-cond">
+            {need.partName ?? <span className="text-dispatched-ink">no part has this number</span>}
+          </span>
         </Cell>
         <Cell figure head="Needed">
           {need.pieces}
@@ -52,7 +54,15 @@ export function NeedLine({ need, assembly, span }: NeedLineProps) {
         </Cell>
         <Cell>
           <span className="flex flex-wrap items-center gap-x-3 gap-y-0.5 whitespace-nowrap">
-            <SteelRule small to={need.pieces} tick={tick} number={tick * 5} value={ready} width={104} says={`${ready} of ${need.pieces} ready`} />
+            <SteelRule
+              small
+              to={need.pieces}
+              tick={tick}
+              number={tick * 5}
+              value={ready}
+              width={104}
+              says={`${ready} of ${need.pieces} ready`}
+            />
             <span className="num">
               {ready} of {need.pieces}
             </span>
@@ -102,7 +112,8 @@ export function NeedLine({ need, assembly, span }: NeedLineProps) {
 
 function Rest({ need }: { need: AssemblyNeedRow }) {
   const clock = useClock();
-  if (readyOf(need) >= need.pieces) return <span className="text-quiet">{need.fitted >= need.pieces ? 'all fitted' : 'all here'}</span>;
+  if (readyOf(need) >= need.pieces)
+    return <span className="text-quiet">{need.fitted >= need.pieces ? 'all fitted' : 'all here'}</span>;
   const toMake = stillToMake(need);
   const inYard = yardWords(need);
   return (

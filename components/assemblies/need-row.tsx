@@ -28,7 +28,9 @@ export function NeedRow({ at, fitted, isLast, onRemove, onTyped }: NeedRowProps)
   const { data } = useLazyRead(listParts, { text: looked, limit: 8 }, { enabled: looked.length >= 2 });
   const known = data?.rows.find((part) => part.number === typed);
   const errors = formState.errors.needs?.[at];
-  const hint = known?.name ?? (data && typed.length >= 2 && data.rows.length === 0 ? 'No part has this number yet.' : undefined);
+  const hint =
+    known?.name ??
+    (data && typed.length >= 2 && data.rows.length === 0 ? 'No part has this number yet.' : undefined);
   const name = register(`needs.${at}.partNumber`);
   return (
     <li className="grid grid-cols-[minmax(0,1fr)_6.5rem] items-start gap-x-3 gap-y-1 border-b border-rule py-2 sm:grid-cols-[minmax(0,22rem)_8rem_1fr]">
@@ -52,7 +54,13 @@ export function NeedRow({ at, fitted, isLast, onRemove, onTyped }: NeedRowProps)
           </option>
         ))}
       </datalist>
-      <NumberInput label="Pieces" inputMode="numeric" error={errors?.pieces?.message} hint={fitted > 0 ? `${fitted} fitted` : undefined} {...register(`needs.${at}.pieces`)} />
+      <NumberInput
+        label="Pieces"
+        inputMode="numeric"
+        error={errors?.pieces?.message}
+        hint={fitted > 0 ? `${fitted} fitted` : undefined}
+        {...register(`needs.${at}.pieces`)}
+      />
       <div className="max-sm:col-span-2 sm:pt-7">
         {!isLast && (
           <Button look="word" onClick={onRemove} notNow={fitted > 0 && `${fitted} are fitted: it stays.`}>

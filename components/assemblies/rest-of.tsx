@@ -12,7 +12,11 @@ const TONES = { late: 'text-held-ink', held: 'text-held-ink' } as const;
 /** A batch by its mark and number, where there is no room for its tag. */
 export function BatchMark({ wait }: { wait: Pick<Wait, 'id' | 'number' | 'stage'> }) {
   return (
-    <Link href={`/batches/${wait.id}`} className={`inline-flex items-center gap-1 whitespace-nowrap no-underline hover:underline ${STAGE_TONES[wait.stage]}`} aria-label={`${wait.number}, ${STAGE_WORDS[wait.stage]}`}>
+    <Link
+      href={`/batches/${wait.id}`}
+      className={`inline-flex items-center gap-1 whitespace-nowrap no-underline hover:underline ${STAGE_TONES[wait.stage]}`}
+      aria-label={`${wait.number}, ${STAGE_WORDS[wait.stage]}`}
+    >
       <StageMark stage={wait.stage} size={12} />
       <span className="num font-semibold text-(--ti)">{wait.number.replace(/^B-/, '')}</span>
     </Link>

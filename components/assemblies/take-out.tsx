@@ -30,7 +30,9 @@ export function TakeOut({ lot, assembly, may }: TakeOutProps) {
           <Link href={`/lots/${lot.lotId}`} className="num font-semibold">
             {lot.lotNumber}
           </Link>
-          {lot.named.length > 0 && <span className="num text-quiet"> {lot.named.map((piece) => piece.serial).join(' ')}</span>}
+          {lot.named.length > 0 && (
+            <span className="num text-quiet"> {lot.named.map((piece) => piece.serial).join(' ')}</span>
+          )}
         </span>
         <span className="ml-auto flex gap-4">
           <Link href={`/lots/${lot.lotId}/dossier`} className="lw-word-button">
@@ -52,15 +54,30 @@ export function TakeOut({ lot, assembly, may }: TakeOutProps) {
 function TakeOutForm({ lot, assembly, onDone }: Omit<TakeOutProps, 'may'> & { onDone: () => void }) {
   const { data } = useLazyRead(listLocations, {});
   const places = (data?.rows ?? []).filter((place) => !place.closed);
-  const form = useForm<SpotFormIn, unknown, SpotFormOut>({ resolver: zodResolver(SpotForm), defaultValues: { isNamed: lot.named.length > 0, pieces: String(lot.pieces), names: [], to: '' } });
-  const write = useWrite(takeOutPieces, { refreshes: [getAssembly, listAssemblies, listStock, getStockSpot, listLocations] });
+  const form = useForm<SpotFormIn, unknown, SpotFormOut>({
+    resolver: zodResolver(SpotForm),
+    defaultValues: { isNamed: lot.named.length > 0, pieces: String(lot.pieces), names: [], to: '' },
+  });
+  const write = useWrite(takeOutPieces, {
+    refreshes: [getAssembly, listAssemblies, listStock, getStockSpot, listLocations],
+  });
   const typed = useWatch({ control: form.control });
-  const count = typedCount({ isNamed: typed.isNamed ?? false, pieces: typed.pieces ?? '', names: typed.names ?? [] });
+  const count = typedCount({
+    isNamed: typed.isNamed ?? false,
+    pieces: typed.pieces ?? '',
+    names: typed.names ?? [],
+  });
   const { errors } = form.formState;
   const submit = form.handleSubmit(async ({ to, ...rest }) => {
     if (to === '') return form.setError('to', { type: 'local', message: 'Choose the place they go to.' });
     const done = await write
-      .mutateAsync({ lotId: lot.lotId, assemblyId: assembly.id, locationId: to, ...rest }, { onError: ({ problem }) => form.setError('root', { type: 'server', message: problem.fields?.[0]?.message ?? problem.title }) })
+      .mutateAsync(
+        { lotId: lot.lotId, assemblyId: assembly.id, locationId: to, ...rest },
+        {
+          onError: ({ problem }) =>
+            form.setError('root', { type: 'server', message: problem.fields?.[0]?.message ?? problem.title }),
+        },
+      )
       .catch(() => null);
     if (!done) return;
     showMessage({ says: `${rest.pieces} of ${lot.lotNumber} taken out of ${assembly.name}.` });
@@ -70,7 +87,14 @@ function TakeOutForm({ lot, assembly, onDone }: Omit<TakeOutProps, 'may'> & { on
     <form noValidate onSubmit={submit} aria-label={`Take ${lot.lotNumber} out`} className="pt-2">
       <div className="flex flex-wrap items-start gap-x-4 gap-y-3">
         <SpotPieces form={form} label="Pieces to take out" max={lot.pieces} named={lot.named} />
-        <SelectField label="To the place" className="min-w-44 flex-1" empty="Choose a place" error={errors.to?.message} options={places.map(({ id, name }) => ({ value: id, says: name }))} {...form.register('to')} />
+        <SelectField
+          label="To the place"
+          className="min-w-44 flex-1"
+          empty="Choose a place"
+          error={errors.to?.message}
+          options={places.map(({ id, name }) => ({ value: id, says: name }))}
+          {...form.register('to')}
+        />
       </div>
       <div className="pt-3">
         <Button type="submit" busy={write.isPending} busyLabel="Taking out">

@@ -21,12 +21,28 @@ interface TrailProps {
 
 /** Who did what, when and from where; newest first, further back on demand. */
 export function Trail({ asked, zone, ofOneThing = false }: TrailProps) {
-  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listAudit, asked);
+  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(
+    listAudit,
+    asked,
+  );
   if (isPending) return <Loading label="Loading the history" />;
   if (error) return <Failing says="The history could not be read." again={error.message} />;
   const rows = data.pages.flatMap((page) => page.rows);
-  if (rows.length === 0) return <Empty says="Nothing is recorded here." comes="Each change stands here with who, when and from where." />;
-  const columns = [{ says: 'When' }, { says: 'Who' }, ...(ofOneThing ? [] : [{ says: 'Thing' }]), { says: 'What' }, { says: 'Change' }, { says: 'No.', right: true }];
+  if (rows.length === 0)
+    return (
+      <Empty
+        says="Nothing is recorded here."
+        comes="Each change stands here with who, when and from where."
+      />
+    );
+  const columns = [
+    { says: 'When' },
+    { says: 'Who' },
+    ...(ofOneThing ? [] : [{ says: 'Thing' }]),
+    { says: 'What' },
+    { says: 'Change' },
+    { says: 'No.', right: true },
+  ];
   return (
     <>
       <Table label="History" columns={columns} dense>
@@ -36,7 +52,12 @@ export function Trail({ asked, zone, ofOneThing = false }: TrailProps) {
       </Table>
       {hasNextPage && (
         <div className="pt-3">
-          <Button size="small" busy={isFetchingNextPage} busyLabel="Reading further back" onClick={() => fetchNextPage().then(() => undefined)}>
+          <Button
+            size="small"
+            busy={isFetchingNextPage}
+            busyLabel="Reading further back"
+            onClick={() => fetchNextPage().then(() => undefined)}
+          >
             Further back
           </Button>
         </div>
@@ -74,7 +95,11 @@ function TrailRow({ entry, zone, ofOneThing }: { entry: AuditEntry; zone: string
 }
 
 function actorNote({ actorKind, address }: AuditEntry): string {
-  const by: Record<string, string> = { token: ', with a token', link: ', by the mailed link', job: ', by itself' };
+  const by: Record<string, string> = {
+    token: ', with a token',
+    link: ', by the mailed link',
+    job: ', by itself',
+  };
   return `${by[actorKind] ?? ''}${address === null ? '' : `, from ${address}`}`;
 }
 
@@ -96,11 +121,16 @@ function Changes({ entry }: { entry: AuditEntry }) {
   const changes = changesBetween(entry.before, entry.after);
   const lines = changes.map(({ field, before, after }) => (
     <li key={field} className="break-words">
-      <span className="text-quiet">{field}</span> {before !== null && <s className="text-quiet">{before}</s>} {after ?? 'none'}
+      <span className="text-quiet">{field}</span> {before !== null && <s className="text-quiet">{before}</s>}{' '}
+      {after ?? 'none'}
     </li>
   ));
-  const letters = changes.reduce((sum, { before, after }) => sum + (before?.length ?? 0) + (after?.length ?? 0), 0);
-  if (lines.length <= SHOWN_AT_ONCE && letters <= LETTERS_AT_ONCE) return <ul className="max-w-[36rem]">{lines}</ul>;
+  const letters = changes.reduce(
+    (sum, { before, after }) => sum + (before?.length ?? 0) + (after?.length ?? 0),
+    0,
+  );
+  if (lines.length <= SHOWN_AT_ONCE && letters <= LETTERS_AT_ONCE)
+    return <ul className="max-w-[36rem]">{lines}</ul>;
   return (
     <details className="max-w-[36rem]">
       <summary className="cursor-pointer">{changes.map((change) => change.field).join(', ')}</summary>

@@ -49,7 +49,20 @@ export function BatchHead({ batchId }: { batchId: string }) {
 
 function HeadCells({ batch }: { batch: Batch }) {
   const clock = useClock();
-  const left = batch.dispatchedAt === null ? { caption: 'Leaves', value: batch.leavesOn ? <Day day={batch.leavesOn} clock={clock} /> : <span className="text-quiet">no day</span> } : { caption: 'Left', value: <Day day={calendarDay(new Date(batch.dispatchedAt), clock.zone)} clock={clock} /> };
+  const left =
+    batch.dispatchedAt === null
+      ? {
+          caption: 'Leaves',
+          value: batch.leavesOn ? (
+            <Day day={batch.leavesOn} clock={clock} />
+          ) : (
+            <span className="text-quiet">no day</span>
+          ),
+        }
+      : {
+          caption: 'Left',
+          value: <Day day={calendarDay(new Date(batch.dispatchedAt), clock.zone)} clock={clock} />,
+        };
   return (
     <TitleCells
       cells={[
@@ -58,7 +71,14 @@ function HeadCells({ batch }: { batch: Batch }) {
         { caption: 'Specification', value: batch.specification },
         { caption: 'Order', value: <span className="num">{batch.orderNumber}</span> },
         left,
-        { caption: 'Wanted back', value: batch.wantedBackOn ? <Day day={batch.wantedBackOn} clock={clock} /> : <span className="text-quiet">no day</span> },
+        {
+          caption: 'Wanted back',
+          value: batch.wantedBackOn ? (
+            <Day day={batch.wantedBackOn} clock={clock} />
+          ) : (
+            <span className="text-quiet">no day</span>
+          ),
+        },
         ...(batch.promisedOn ? [{ caption: 'Promised', value: <Promised batch={batch} /> }] : []),
       ]}
     />
@@ -83,8 +103,15 @@ function Actions({ batch }: { batch: Batch }) {
   if (batch.cancelledAt !== null) return null;
   const isHere = batch.dispatchedAt === null;
   const putAside = async () => {
-    const done = await aside.run({ batchId: batch.id, version: batch.version, aside: batch.putAsideAt === null });
-    if (done) showMessage({ says: batch.putAsideAt === null ? `${batch.number} is put aside.` : `${batch.number} is taken up.` });
+    const done = await aside.run({
+      batchId: batch.id,
+      version: batch.version,
+      aside: batch.putAsideAt === null,
+    });
+    if (done)
+      showMessage({
+        says: batch.putAsideAt === null ? `${batch.number} is put aside.` : `${batch.number} is taken up.`,
+      });
   };
   const mayCancel = mayDispatch && batch.piecesBack === 0;
   const mayReissue = mayDispatch && !isHere && batch.stage !== 'settled' && batch.stage !== 'stocked';
@@ -95,7 +122,9 @@ function Actions({ batch }: { batch: Batch }) {
           Cancel it
         </Button>
       )}
-      {isHere && mayBuild && <Button onClick={putAside}>{batch.putAsideAt === null ? 'Put aside' : 'Take it up'}</Button>}
+      {isHere && mayBuild && (
+        <Button onClick={putAside}>{batch.putAsideAt === null ? 'Put aside' : 'Take it up'}</Button>
+      )}
       {mayReissue && <ButtonLink href={`/batches/${batch.id}/reissue`}>Re-issue</ButtonLink>}
       {isHere && mayDispatch && <Dispatch batch={batch} press={() => setOpen('dispatch')} />}
       <DispatchDialog batch={batch} open={open === 'dispatch'} onClose={() => setOpen(null)} />
@@ -108,7 +137,11 @@ function Dispatch({ batch, press }: { batch: Batch; press: () => void }) {
   const { data } = useRead(getBatchChecks, { batchId: batch.id });
   const stops = data.findings.filter((finding) => finding.level === 'stop' && finding.passed === null).length;
   return (
-    <Button look="primary" onClick={press} notNow={stops > 0 && `${stops} ${stops === 1 ? 'thing stops' : 'things stop'} it`}>
+    <Button
+      look="primary"
+      onClick={press}
+      notNow={stops > 0 && `${stops} ${stops === 1 ? 'thing stops' : 'things stop'} it`}
+    >
       Dispatch
     </Button>
   );
@@ -119,12 +152,27 @@ export function HowItStands({ batchId }: { batchId: string }) {
   const { data: batch } = useRead(getBatch, { batchId });
   const clock = useClock();
   const steps = [
-    ...(batch.dispatchedAt ? [{ at: batch.dispatchedAt, says: `dispatched by ${batch.dispatchedBy ?? 'someone who has left'}` }] : []),
-    ...(batch.acknowledgedAt ? [{ at: batch.acknowledgedAt, says: `${batch.processor} has ${batch.acknowledgedPieces ?? batch.pieces} of ${batch.pieces} pieces` }] : []),
+    ...(batch.dispatchedAt
+      ? [{ at: batch.dispatchedAt, says: `dispatched by ${batch.dispatchedBy ?? 'someone who has left'}` }]
+      : []),
+    ...(batch.acknowledgedAt
+      ? [
+          {
+            at: batch.acknowledgedAt,
+            says: `${batch.processor} has ${batch.acknowledgedPieces ?? batch.pieces} of ${batch.pieces} pieces`,
+          },
+        ]
+      : []),
     ...(batch.markedDoneAt ? [{ at: batch.markedDoneAt, says: `${batch.processor} says it is done` }] : []),
-    ...(batch.shippedAt ? [{ at: batch.shippedAt, says: `shipped back${batch.shippedNote ? `: ${batch.shippedNote}` : ''}` }] : []),
-    ...(batch.lastBackAt ? [{ at: batch.lastBackAt, says: `${batch.piecesBack} of ${batch.pieces} pieces counted in` }] : []),
-    ...(batch.paymentWaivedAt ? [{ at: batch.paymentWaivedAt, says: `payment waived: ${batch.paymentWaivedReason ?? ''}` }] : []),
+    ...(batch.shippedAt
+      ? [{ at: batch.shippedAt, says: `shipped back${batch.shippedNote ? `: ${batch.shippedNote}` : ''}` }]
+      : []),
+    ...(batch.lastBackAt
+      ? [{ at: batch.lastBackAt, says: `${batch.piecesBack} of ${batch.pieces} pieces counted in` }]
+      : []),
+    ...(batch.paymentWaivedAt
+      ? [{ at: batch.paymentWaivedAt, says: `payment waived: ${batch.paymentWaivedReason ?? ''}` }]
+      : []),
   ];
   return (
     <ol aria-label="How far it came" className="border-t-heavy border-ink">

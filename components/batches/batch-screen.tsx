@@ -30,7 +30,11 @@ export function BatchScreen({ batchId }: { batchId: string }) {
   return (
     <>
       <BatchHead batchId={batchId} />
-      {isHere ? <Building batchId={batchId} isOpen={batch.cancelledAt === null} /> : <Sent batchId={batchId} />}
+      {isHere ? (
+        <Building batchId={batchId} isOpen={batch.cancelledAt === null} />
+      ) : (
+        <Sent batchId={batchId} />
+      )}
     </>
   );
 }

@@ -21,13 +21,23 @@ export interface BatchFilter {
   stage?: Stage;
 }
 
-const COLUMNS = [{ says: 'Batch' }, { says: 'Processor' }, { says: 'Step' }, { says: 'Pieces', right: true }, { says: 'Left' }, { says: 'Back' }, { says: 'Order' }];
+const COLUMNS = [
+  { says: 'Batch' },
+  { says: 'Processor' },
+  { says: 'Step' },
+  { says: 'Pieces', right: true },
+  { says: 'Left' },
+  { says: 'Back' },
+  { says: 'Order' },
+];
 
 /** Every batch, newest first; the stage stands in the address. */
 export function BatchesScreen({ filter }: { filter: BatchFilter }) {
   const mayBuild = useMay('batch.build');
   const clock = useClock();
-  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listBatches, { ...filter });
+  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listBatches, {
+    ...filter,
+  });
   const rows = data?.pages.flatMap((page) => page.rows) ?? [];
   return (
     <>
@@ -42,11 +52,30 @@ export function BatchesScreen({ filter }: { filter: BatchFilter }) {
         }
       />
       <div className="pb-3">
-        <Segments label="Stage" items={[{ says: 'All', href: '/batches', current: filter.stage === undefined }, ...STAGES.map((stage) => ({ says: STAGE_WORDS[stage], href: `/batches?stage=${stage}`, current: filter.stage === stage }))]} />
+        <Segments
+          label="Stage"
+          items={[
+            { says: 'All', href: '/batches', current: filter.stage === undefined },
+            ...STAGES.map((stage) => ({
+              says: STAGE_WORDS[stage],
+              href: `/batches?stage=${stage}`,
+              current: filter.stage === stage,
+            })),
+          ]}
+        />
       </div>
       {isPending && <Loading label="Loading batches" rows={8} />}
       {error && <Failing says="The batches could not be read." again={error.message} />}
-      {data && rows.length === 0 && (filter.stage ? <Empty says={`No batch is ${STAGE_WORDS[filter.stage]}.`} /> : <Empty says="There is no batch yet." comes="It gathers lots that wait for the same step and sends them to one processor." />)}
+      {data &&
+        rows.length === 0 &&
+        (filter.stage ? (
+          <Empty says={`No batch is ${STAGE_WORDS[filter.stage]}.`} />
+        ) : (
+          <Empty
+            says="There is no batch yet."
+            comes="It gathers lots that wait for the same step and sends them to one processor."
+          />
+        ))}
       {rows.length > 0 && (
         <Table label="Batches" columns={COLUMNS}>
           {rows.map((row) => (
@@ -65,7 +94,13 @@ function BatchLine({ row, clock }: { row: BatchRow; clock: Clock }) {
   return (
     <Row>
       <Cell>
-        <BatchTag href={`/batches/${row.id}`} size="list" stage={row.stage} number={row.number} daysLate={row.daysLate} />
+        <BatchTag
+          href={`/batches/${row.id}`}
+          size="list"
+          stage={row.stage}
+          number={row.number}
+          daysLate={row.daysLate}
+        />
       </Cell>
       <Cell strong>{row.processor}</Cell>
       <Cell head="Step">{PROCESS_WORDS[row.process]}</Cell>
@@ -74,7 +109,11 @@ function BatchLine({ row, clock }: { row: BatchRow; clock: Clock }) {
       </Cell>
       <Cell head="Left">{leftWords(row, clock, day)}</Cell>
       <Cell head="Back">
-        {row.daysLate > 0 ? <strong className="text-held-ink">{row.daysLate} d late</strong> : backWords(row, clock, day)}
+        {row.daysLate > 0 ? (
+          <strong className="text-held-ink">{row.daysLate} d late</strong>
+        ) : (
+          backWords(row, clock, day)
+        )}
       </Cell>
       <Cell code head="Order">
         {row.orderNumber}

@@ -20,9 +20,13 @@ export function ChecksSection({ batchId }: { batchId: string }) {
   const { data: batch } = useRead(getBatch, { batchId });
   const { data } = useRead(getBatchChecks, { batchId });
   const [overriding, setOverriding] = useState<BatchFinding | null>(null);
-  const count = (level: BatchFinding['level']) => data.findings.filter((finding) => finding.level === level && finding.passed === null).length;
+  const count = (level: BatchFinding['level']) =>
+    data.findings.filter((finding) => finding.level === level && finding.passed === null).length;
   return (
-    <Section title="Before it leaves" action={<Counts stops={count('stop')} warns={count('warn')} notes={count('note')} />}>
+    <Section
+      title="Before it leaves"
+      action={<Counts stops={count('stop')} warns={count('warn')} notes={count('note')} />}
+    >
       {data.findings.length > 0 && (
         <CheckList label="Before it leaves">
           {data.findings.map((finding) => (
@@ -32,7 +36,13 @@ export function ChecksSection({ batchId }: { batchId: string }) {
               sentence={finding.sentence}
               rest={finding.rest}
               source={finding.source}
-              waysOut={finding.passed ? <Passed batch={batch} finding={finding} /> : <WaysOut batch={batch} finding={finding} override={() => setOverriding(finding)} />}
+              waysOut={
+                finding.passed ? (
+                  <Passed batch={batch} finding={finding} />
+                ) : (
+                  <WaysOut batch={batch} finding={finding} override={() => setOverriding(finding)} />
+                )
+              }
             />
           ))}
         </CheckList>
@@ -54,7 +64,11 @@ export function ChecksSection({ batchId }: { batchId: string }) {
 function Counts({ stops, warns, notes }: { stops: number; warns: number; notes: number }) {
   return (
     <span className="text-second">
-      {stops > 0 ? <strong className="text-held-ink">{`${stops} ${stops === 1 ? 'stops' : 'stop'} it`}</strong> : 'nothing stops it'}
+      {stops > 0 ? (
+        <strong className="text-held-ink">{`${stops} ${stops === 1 ? 'stops' : 'stop'} it`}</strong>
+      ) : (
+        'nothing stops it'
+      )}
       {warns > 0 && (
         <>
           , <strong className="text-dispatched-ink">{`${warns} ${warns === 1 ? 'warns' : 'warn'}`}</strong>
@@ -74,7 +88,15 @@ const ANCHORS: Partial<Record<BatchFinding['waysOut'][number]['way'], string>> =
   choose_processor: '#terms',
 };
 
-function WaysOut({ batch, finding, override }: { batch: Batch; finding: BatchFinding; override: () => void }) {
+function WaysOut({
+  batch,
+  finding,
+  override,
+}: {
+  batch: Batch;
+  finding: BatchFinding;
+  override: () => void;
+}) {
   const [mayBuild, mayOverride] = [useMay('batch.build'), useMay('batch.override')];
   const takeOut = useBatchWrite(removeLine);
   const aside = useBatchWrite(putBatchAside);
@@ -89,17 +111,41 @@ function WaysOut({ batch, finding, override }: { batch: Batch; finding: BatchFin
         </a>
       );
     }
-    if (way === 'see_processor') return <Link key={way} href={`/processors/${batch.processorId}`} className="lw-word-button">{says}</Link>;
+    if (way === 'see_processor')
+      return (
+        <Link key={way} href={`/processors/${batch.processorId}`} className="lw-word-button">
+          {says}
+        </Link>
+      );
     if (way === 'take_out_line' && lineId) {
       return (
-        <Button key={way} look="word" onClick={async () => void ((await takeOut.run({ ...seen, lineId })) && showMessage({ says: 'The line is out. Its pieces wait for the step again.' }))}>
+        <Button
+          key={way}
+          look="word"
+          onClick={async () =>
+            void (
+              (await takeOut.run({ ...seen, lineId })) &&
+              showMessage({ says: 'The line is out. Its pieces wait for the step again.' })
+            )
+          }
+        >
           {says}
         </Button>
       );
     }
-    if (way === 'take_up') return <Button key={way} look="word" onClick={() => aside.run({ ...seen, aside: false })}>{says}</Button>;
+    if (way === 'take_up')
+      return (
+        <Button key={way} look="word" onClick={() => aside.run({ ...seen, aside: false })}>
+          {says}
+        </Button>
+      );
     if (way !== 'override') return null;
-    if (!mayOverride) return <span key={way} className="text-quiet">An admin can let it pass.</span>;
+    if (!mayOverride)
+      return (
+        <span key={way} className="text-quiet">
+          An admin can let it pass.
+        </span>
+      );
     return (
       <Button key={way} look="word" onClick={override}>
         {says}
@@ -120,7 +166,12 @@ function Passed({ batch, finding }: { batch: Batch; finding: BatchFinding }) {
         Let pass by {passed.by}, {momentWords(new Date(passed.at), clock)}: {passed.reason}
       </span>
       {mayOverride && (
-        <Button look="word" onClick={() => withdraw.run({ batchId: batch.id, version: batch.version, overrideId: passed.overrideId })}>
+        <Button
+          look="word"
+          onClick={() =>
+            withdraw.run({ batchId: batch.id, version: batch.version, overrideId: passed.overrideId })
+          }
+        >
           Take that back
         </Button>
       )}

@@ -23,7 +23,10 @@ export function DispatchDialog({ batch, open, onClose }: DialogOfBatch) {
   const send = async () => {
     const done = await run({ batchId: batch.id, version: batch.version });
     onClose();
-    if (done) showMessage({ says: `${batch.number} is dispatched. The mail to ${batch.contactEmail} goes as soon as the papers are made.` });
+    if (done)
+      showMessage({
+        says: `${batch.number} is dispatched. The mail to ${batch.contactEmail} goes as soon as the papers are made.`,
+      });
   };
   return (
     <Dialog
@@ -63,8 +66,12 @@ export function DispatchDialog({ batch, open, onClose }: DialogOfBatch) {
         </div>
       )}
       {passed.map((finding) => (
-        <div key={finding.code + finding.subject} className="mt-3 border-l-4 border-held py-[3px] pl-3 text-second">
-          <strong>Let pass by {finding.passed?.by}:</strong> {finding.sentence} The reason prints on the traveller.
+        <div
+          key={finding.code + finding.subject}
+          className="mt-3 border-l-4 border-held py-[3px] pl-3 text-second"
+        >
+          <strong>Let pass by {finding.passed?.by}:</strong> {finding.sentence} The reason prints on the
+          traveller.
         </div>
       ))}
     </Dialog>

@@ -14,9 +14,15 @@ const LOADS = [1, 2, 3, 4, 5, 6].map((load) => ({ value: String(load), says: `lo
 
 /** Pieces, price and load of one line, under its row. */
 export function LineEditor({ batch, line, onDone }: { batch: Batch; line: BatchLine; onDone: () => void }) {
-  const [typed, setTyped] = useState({ pieces: String(line.pieces), price: typedAmount(line.unitPriceMinor), load: line.loadNo === null ? '' : String(line.loadNo) });
+  const [typed, setTyped] = useState({
+    pieces: String(line.pieces),
+    price: typedAmount(line.unitPriceMinor),
+    load: line.loadNo === null ? '' : String(line.loadNo),
+  });
   const [wrong, setWrong] = useState<Readonly<Record<string, string>>>({});
-  const change = useBatchWrite(changeLine, (error) => setWrong(Object.fromEntries((error.problem.fields ?? []).map(({ field, message }) => [field, message]))));
+  const change = useBatchWrite(changeLine, (error) =>
+    setWrong(Object.fromEntries((error.problem.fields ?? []).map(({ field, message }) => [field, message]))),
+  );
   const remove = useBatchWrite(removeLine);
   const add = useBatchWrite(addLine);
   const most = line.pieces + line.waiting;
@@ -26,12 +32,21 @@ export function LineEditor({ batch, line, onDone }: { batch: Batch; line: BatchL
     const price = Price.safeParse(typed.price.trim() === '' ? '0' : typed.price);
     const pieces = Number(typed.pieces);
     const faults = {
-      ...(Number.isInteger(pieces) && pieces > 0 && typed.pieces.trim() !== '' ? {} : { pieces: `Enter a whole number from 1 to ${most}.` }),
-      ...(price.success ? {} : { unitPriceMinor: price.error.issues[0]?.message ?? 'This is not an amount.' }),
+      ...(Number.isInteger(pieces) && pieces > 0 && typed.pieces.trim() !== ''
+        ? {}
+        : { pieces: `Enter a whole number from 1 to ${most}.` }),
+      ...(price.success
+        ? {}
+        : { unitPriceMinor: price.error.issues[0]?.message ?? 'This is not an amount.' }),
     };
     setWrong(faults);
     if (!price.success || Object.keys(faults).length > 0) return;
-    const done = await change.run({ ...seen, pieces, unitPriceMinor: price.data, loadNo: typed.load === '' ? null : Number(typed.load) });
+    const done = await change.run({
+      ...seen,
+      pieces,
+      unitPriceMinor: price.data,
+      loadNo: typed.load === '' ? null : Number(typed.load),
+    });
     if (!done) return;
     onDone();
     showMessage({ says: `Line ${line.lineNo} is changed.` });
@@ -42,7 +57,13 @@ export function LineEditor({ batch, line, onDone }: { batch: Batch; line: BatchL
     onDone();
     const { lotId, stepId, pieces, unitPriceMinor } = line;
     // What was worded by hand for this line is gone with it; the route's own words come back.
-    showMessage({ says: `${line.lotNumber} is out of ${batch.number}.`, action: { says: 'Undo', run: () => add.run({ batchId: batch.id, lotId, stepId, pieces, unitPriceMinor }) } });
+    showMessage({
+      says: `${line.lotNumber} is out of ${batch.number}.`,
+      action: {
+        says: 'Undo',
+        run: () => add.run({ batchId: batch.id, lotId, stepId, pieces, unitPriceMinor }),
+      },
+    });
   };
   return (
     <form
@@ -54,9 +75,31 @@ export function LineEditor({ batch, line, onDone }: { batch: Batch; line: BatchL
         void save();
       }}
     >
-      <NumberInput className="w-36" label="Pieces" unit={`of ${most}`} inputMode="numeric" value={typed.pieces} error={wrong['pieces']} onChange={(event) => setTyped({ ...typed, pieces: event.currentTarget.value })} />
-      <NumberInput className="w-36" label="Price each" unit={batch.currency} value={typed.price} error={wrong['unitPriceMinor']} onChange={(event) => setTyped({ ...typed, price: event.currentTarget.value })} />
-      <SelectField className="w-32" label="Load" empty="no load" options={LOADS} value={typed.load} onChange={(event) => setTyped({ ...typed, load: event.currentTarget.value })} />
+      <NumberInput
+        className="w-36"
+        label="Pieces"
+        unit={`of ${most}`}
+        inputMode="numeric"
+        value={typed.pieces}
+        error={wrong['pieces']}
+        onChange={(event) => setTyped({ ...typed, pieces: event.currentTarget.value })}
+      />
+      <NumberInput
+        className="w-36"
+        label="Price each"
+        unit={batch.currency}
+        value={typed.price}
+        error={wrong['unitPriceMinor']}
+        onChange={(event) => setTyped({ ...typed, price: event.currentTarget.value })}
+      />
+      <SelectField
+        className="w-32"
+        label="Load"
+        empty="no load"
+        options={LOADS}
+        value={typed.load}
+        onChange={(event) => setTyped({ ...typed, load: event.currentTarget.value })}
+      />
       <span className="flex flex-wrap items-center gap-3 pt-[21px]">
         <Button type="submit" busy={change.busy} busyLabel="Saving">
           {`Save line ${line.lineNo}`}

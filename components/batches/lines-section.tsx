@@ -31,7 +31,11 @@ export function LinesSection({ batchId }: { batchId: string }) {
       note={`${lots} ${lots === 1 ? 'lot' : 'lots'}, one step: ${PROCESS_WORDS[batch.process]}${batch.dispatchedAt ? ', frozen at dispatch' : ''}`}
       action={
         mayBuild && (
-          <Button look="word" shortcut="A" onClick={() => document.getElementById('ride-along')?.scrollIntoView({ block: 'center' })}>
+          <Button
+            look="word"
+            shortcut="A"
+            onClick={() => document.getElementById('ride-along')?.scrollIntoView({ block: 'center' })}
+          >
             Add a lot
           </Button>
         )
@@ -42,7 +46,12 @@ export function LinesSection({ batchId }: { batchId: string }) {
         <Table label="Lines" columns={columnsOf(units, mayBuild)}>
           {data.lines.map((line) => (
             <Fragment key={line.id}>
-              <LineRow line={line} units={units} open={openId === line.id} toggle={mayBuild ? () => setOpen(openId === line.id ? null : line.id) : undefined} />
+              <LineRow
+                line={line}
+                units={units}
+                open={openId === line.id}
+                toggle={mayBuild ? () => setOpen(openId === line.id ? null : line.id) : undefined}
+              />
               {openId === line.id && (
                 <tr role="row">
                   <td role="cell" colSpan={columnsOf(units, mayBuild).length} className="bg-bench">
@@ -73,7 +82,17 @@ const columnsOf = (units: Units, mayChange: boolean) => [
   ...(mayChange ? [{ says: 'Change', hidden: true }] : []),
 ];
 
-function LineRow({ line, units, open, toggle }: { line: BatchLine; units: Units; open: boolean; toggle: (() => void) | undefined }) {
+function LineRow({
+  line,
+  units,
+  open,
+  toggle,
+}: {
+  line: BatchLine;
+  units: Units;
+  open: boolean;
+  toggle: (() => void) | undefined;
+}) {
   return (
     <Row selected={open}>
       <Cell code quiet>
@@ -88,14 +107,20 @@ function LineRow({ line, units, open, toggle }: { line: BatchLine; units: Units;
         <Link href={`/parts/${line.partId}`} className="num font-semibold no-underline hover:underline">
           {line.partNumber}
         </Link>{' '}
-        <span className="text-quiet">rev</span> <span className="num">{line.partRevision}</span> {line.partName}
-        {line.serials.length > 0 && <span className="block text-source text-quiet">serials {line.serials.join(', ')}</span>}
+        <span className="text-quiet">rev</span> <span className="num">{line.partRevision}</span>{' '}
+        {line.partName}
+        {line.serials.length > 0 && (
+          <span className="block text-source text-quiet">serials {line.serials.join(', ')}</span>
+        )}
       </Cell>
       <Cell head="Material">
-        <span className="font-cond">{line.material}</span> <span className="num whitespace-nowrap">{line.thickness}</span>
+        <span className="font-cond">{line.material}</span>{' '}
+        <span className="num whitespace-nowrap">{line.thickness}</span>
       </Cell>
       <Cell code head="Condition" className="whitespace-nowrap">
-        {line.conditionBefore} {line.conditionBefore && line.targetCondition && <span className="font-cond text-faint">to</span>} {line.targetCondition}
+        {line.conditionBefore}{' '}
+        {line.conditionBefore && line.targetCondition && <span className="font-cond text-faint">to</span>}{' '}
+        {line.targetCondition}
       </Cell>
       <Cell figure strong head="Pieces">
         {line.pieces.toLocaleString('en-US')}

@@ -23,15 +23,30 @@ export function LinkSection({ batchId }: { batchId: string }) {
   const standing = data.links.filter((link) => link.withdrawnAt === null);
   const opened = standing.find((link) => link.firstOpenedAt !== null)?.firstOpenedAt ?? null;
 
-  const tell = (work: Promise<string>) => work.then((says) => showMessage({ says })).catch((error: unknown) => showMessage({ says: error instanceof Error ? error.message : 'Nothing was changed.', failed: true }));
+  const tell = (work: Promise<string>) =>
+    work
+      .then((says) => showMessage({ says }))
+      .catch((error: unknown) =>
+        showMessage({ says: error instanceof Error ? error.message : 'Nothing was changed.', failed: true }),
+      );
   const sendNew = () => tell(send.mutateAsync({ batchId }).then(({ sentTo }) => `A link goes to ${sentTo}.`));
-  const end = () => tell(withdraw.mutateAsync({ batchId }).then(() => 'The link is withdrawn.')).finally(() => setAsking(false));
+  const end = () =>
+    tell(withdraw.mutateAsync({ batchId }).then(() => 'The link is withdrawn.')).finally(() =>
+      setAsking(false),
+    );
   return (
     <Section title="Link of the processor">
       <p className="py-1.5 text-second text-quiet">
         {data.ended && 'It ended with the batch. '}
-        {!data.ended && (standing.length > 0 ? `It stands, mailed to ${data.deskEmail}` : 'No link stands: the processor cannot open this batch without signing in.')}
-        {!data.ended && standing.length > 0 && (opened === null ? ', not opened yet.' : `, first opened ${momentWords(new Date(opened), { zone: data.zone, now: new Date(opened) })}.`)}
+        {!data.ended &&
+          (standing.length > 0
+            ? `It stands, mailed to ${data.deskEmail}`
+            : 'No link stands: the processor cannot open this batch without signing in.')}
+        {!data.ended &&
+          standing.length > 0 &&
+          (opened === null
+            ? ', not opened yet.'
+            : `, first opened ${momentWords(new Date(opened), { zone: data.zone, now: new Date(opened) })}.`)}
       </p>
       {mayDispatch && !data.ended && (
         <div className="flex flex-wrap gap-2 pb-2">

@@ -19,7 +19,16 @@ interface LotChoiceProps {
 /** Lots with a tick and how many pieces of each go along. */
 export function LotChoice({ rows, typed, wrong, onType }: LotChoiceProps) {
   const units = useMe()?.units ?? 'inch';
-  const columns = [{ says: 'Goes along', hidden: true }, { says: 'Lot' }, { says: 'Part' }, { says: 'Material' }, { says: 'Condition' }, { says: `Mass, ${massUnit(units)}`, right: true }, { says: 'Waits', right: true }, { says: 'Pieces', right: true }];
+  const columns = [
+    { says: 'Goes along', hidden: true },
+    { says: 'Lot' },
+    { says: 'Part' },
+    { says: 'Material' },
+    { says: 'Condition' },
+    { says: `Mass, ${massUnit(units)}`, right: true },
+    { says: 'Waits', right: true },
+    { says: 'Pieces', right: true },
+  ];
   return (
     <Table label="Lots that wait" columns={columns}>
       {rows.map((row) => {
@@ -28,7 +37,13 @@ export function LotChoice({ rows, typed, wrong, onType }: LotChoiceProps) {
         return (
           <Row key={row.lotId} state={goes ? 'rest' : 'off'}>
             <Cell>
-              <input type="checkbox" className="lw-check" aria-label={`${row.lotNumber} goes along`} checked={goes} onChange={(event) => onType(row.lotId, event.currentTarget.checked ? String(row.pieces) : '')} />
+              <input
+                type="checkbox"
+                className="lw-check"
+                aria-label={`${row.lotNumber} goes along`}
+                checked={goes}
+                onChange={(event) => onType(row.lotId, event.currentTarget.checked ? String(row.pieces) : '')}
+              />
             </Cell>
             <Cell>
               <Link href={`/lots/${row.lotId}`} className="num font-semibold">
@@ -36,8 +51,12 @@ export function LotChoice({ rows, typed, wrong, onType }: LotChoiceProps) {
               </Link>
             </Cell>
             <Cell>
-              <span className="num font-semibold">{row.partNumber}</span> <span className="text-quiet">rev</span> <span className="num">{row.partRevision}</span> {row.partName}
-              {row.partSuperseded && <span className="block text-source text-dispatched-ink">superseded drawing</span>}
+              <span className="num font-semibold">{row.partNumber}</span>{' '}
+              <span className="text-quiet">rev</span> <span className="num">{row.partRevision}</span>{' '}
+              {row.partName}
+              {row.partSuperseded && (
+                <span className="block text-source text-dispatched-ink">superseded drawing</span>
+              )}
             </Cell>
             <Cell head="Material">
               <span className="font-cond">{row.material}</span> <span className="num">{row.thickness}</span>
@@ -53,7 +72,15 @@ export function LotChoice({ rows, typed, wrong, onType }: LotChoiceProps) {
             </Cell>
             <Cell right head="Pieces">
               <span className="inline-block w-32 text-left">
-                <input className="lw-input lw-input-number" inputMode="numeric" autoComplete="off" aria-label={`Pieces of ${row.lotNumber}`} value={text} {...fieldAttributes(row.lotId, { error: wrong[row.lotId] })} onChange={(event) => onType(row.lotId, event.currentTarget.value)} />
+                <input
+                  className="lw-input lw-input-number"
+                  inputMode="numeric"
+                  autoComplete="off"
+                  aria-label={`Pieces of ${row.lotNumber}`}
+                  value={text}
+                  {...fieldAttributes(row.lotId, { error: wrong[row.lotId] })}
+                  onChange={(event) => onType(row.lotId, event.currentTarget.value)}
+                />
                 {wrong[row.lotId] && <FieldError id={`${row.lotId}-error`} says={wrong[row.lotId] ?? ''} />}
               </span>
             </Cell>

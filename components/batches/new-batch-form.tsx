@@ -32,18 +32,29 @@ export interface AskedStep {
 export function NewBatchForm({ step }: { step: AskedStep }) {
   const router = useRouter();
   const clock = useClock();
-  const { data: known } = useRead(listStepProcessors, { process: step.process, specification: step.specification });
+  const { data: known } = useRead(listStepProcessors, {
+    process: step.process,
+    specification: step.specification,
+  });
   const lots = usePages(listWaitingLots, { ...step });
   const rows = lots.data?.pages.flatMap((page) => page.rows) ?? [];
   const [typed, setTyped] = useState<Readonly<Record<string, string>>>({});
-  const [processorId, setProcessor] = useState(known.processors.find((one) => one.approved)?.processorId ?? '');
+  const [processorId, setProcessor] = useState(
+    known.processors.find((one) => one.approved)?.processorId ?? '',
+  );
   const [days, setDays] = useState({ leavesOn: '', wantedBackOn: '' });
   const [wrong, setWrong] = useState<Readonly<Record<string, string>>>({});
   const chosen = rows.flatMap((row) => {
     const text = typed[row.lotId] ?? String(row.pieces);
     return text.trim() === '' || text.trim() === '0' ? [] : [{ row, text }];
   });
-  const write = useBatchWrite(createBatch, (error) => setWrong(Object.fromEntries((error.problem.fields ?? []).map(({ field, message }) => [atLot(field, chosen), message]))));
+  const write = useBatchWrite(createBatch, (error) =>
+    setWrong(
+      Object.fromEntries(
+        (error.problem.fields ?? []).map(({ field, message }) => [atLot(field, chosen), message]),
+      ),
+    ),
+  );
 
   const start = async () => {
     setWrong({});
@@ -55,7 +66,10 @@ export function NewBatchForm({ step }: { step: AskedStep }) {
     });
     if (made) router.push(`/batches/${made.id}`);
   };
-  const pieces = chosen.reduce((sum, { text }) => sum + (Number.isInteger(Number(text)) ? Number(text) : 0), 0);
+  const pieces = chosen.reduce(
+    (sum, { text }) => sum + (Number.isInteger(Number(text)) ? Number(text) : 0),
+    0,
+  );
   const notYet = notYetWords(chosen.length, processorId);
   return (
     <form
@@ -69,7 +83,12 @@ export function NewBatchForm({ step }: { step: AskedStep }) {
         title={`Start a batch: ${PROCESS_WORDS[step.process]}`}
         sub={
           <>
-            {specificationWords({ ...step, specificationRevision: step.specificationRevision ?? null, classType: step.classType ?? null })}. <Link href="/batches/new">Another step</Link>
+            {specificationWords({
+              ...step,
+              specificationRevision: step.specificationRevision ?? null,
+              classType: step.classType ?? null,
+            })}
+            . <Link href="/batches/new">Another step</Link>
           </>
         }
         actions={
@@ -81,8 +100,20 @@ export function NewBatchForm({ step }: { step: AskedStep }) {
       <MainAndSide
         main={
           <Section title="Lots that wait" note={`oldest first, ${chosen.length} of ${rows.length} chosen`}>
-            {lots.data && rows.length === 0 && <Empty says="No lot waits for this step any more." action={<Link href="/batches/new">Another step</Link>} />}
-            {rows.length > 0 && <LotChoice rows={rows} typed={typed} wrong={wrong} onType={(lotId, text) => setTyped((was) => ({ ...was, [lotId]: text }))} />}
+            {lots.data && rows.length === 0 && (
+              <Empty
+                says="No lot waits for this step any more."
+                action={<Link href="/batches/new">Another step</Link>}
+              />
+            )}
+            {rows.length > 0 && (
+              <LotChoice
+                rows={rows}
+                typed={typed}
+                wrong={wrong}
+                onType={(lotId, text) => setTyped((was) => ({ ...was, [lotId]: text }))}
+              />
+            )}
             {wrong['lines'] && <FieldError id="lines-error" says={wrong['lines']} />}
             <ShowMore hasMore={lots.hasNextPage} busy={lots.isFetchingNextPage} more={lots.fetchNextPage} />
           </Section>
@@ -91,13 +122,22 @@ export function NewBatchForm({ step }: { step: AskedStep }) {
           <>
             <Section title="To whom">
               <div className="py-2">
-                {known.processors.length === 0 && <Empty says="No processor is entered yet." action={<Link href="/processors">Processors</Link>} />}
+                {known.processors.length === 0 && (
+                  <Empty
+                    says="No processor is entered yet."
+                    action={<Link href="/processors">Processors</Link>}
+                  />
+                )}
                 {known.processors.length > 0 && (
                   <RadioGroup
                     label="Processor"
                     hint="Those approved for this step first. An unapproved one stops the dispatch."
                     name="processor"
-                    options={known.processors.map((one) => ({ value: one.processorId, says: <span className={one.approved ? 'font-semibold' : 'text-quiet'}>{one.name}</span>, note: one.says }))}
+                    options={known.processors.map((one) => ({
+                      value: one.processorId,
+                      says: <span className={one.approved ? 'font-semibold' : 'text-quiet'}>{one.name}</span>,
+                      note: one.says,
+                    }))}
                     chosen={[processorId]}
                     error={wrong['processorId']}
                     onChange={(event) => setProcessor(event.currentTarget.value)}
@@ -107,10 +147,24 @@ export function NewBatchForm({ step }: { step: AskedStep }) {
             </Section>
             <Section title="When">
               <div className="grid grid-cols-2 gap-4 py-2">
-                <DateField label="Leaves" value={days.leavesOn} hint={inWords(days.leavesOn)} error={wrong['leavesOn']} onChange={(event) => setDays({ ...days, leavesOn: event.currentTarget.value })} />
-                <DateField label="Wanted back" value={days.wantedBackOn} hint={inWords(days.wantedBackOn)} error={wrong['wantedBackOn']} onChange={(event) => setDays({ ...days, wantedBackOn: event.currentTarget.value })} />
+                <DateField
+                  label="Leaves"
+                  value={days.leavesOn}
+                  hint={inWords(days.leavesOn)}
+                  error={wrong['leavesOn']}
+                  onChange={(event) => setDays({ ...days, leavesOn: event.currentTarget.value })}
+                />
+                <DateField
+                  label="Wanted back"
+                  value={days.wantedBackOn}
+                  hint={inWords(days.wantedBackOn)}
+                  error={wrong['wantedBackOn']}
+                  onChange={(event) => setDays({ ...days, wantedBackOn: event.currentTarget.value })}
+                />
               </div>
-              <p className="text-second text-quiet">Prices, note and what must be proved come next, on the batch&rsquo;s page.</p>
+              <p className="text-second text-quiet">
+                Prices, note and what must be proved come next, on the batch&rsquo;s page.
+              </p>
             </Section>
           </>
         }

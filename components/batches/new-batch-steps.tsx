@@ -12,7 +12,13 @@ import { listWaitingSteps, type WaitingStep } from '@/lib/batches/waiting-contra
 import { calendarDay } from '@/lib/day-words';
 import { PROCESS_WORDS } from '@/lib/trade/process';
 
-const COLUMNS = [{ says: 'Step' }, { says: 'Specification' }, { says: 'Lots', right: true }, { says: 'Pieces', right: true }, { says: 'Oldest lot of' }];
+const COLUMNS = [
+  { says: 'Step' },
+  { says: 'Specification' },
+  { says: 'Lots', right: true },
+  { says: 'Pieces', right: true },
+  { says: 'Oldest lot of' },
+];
 
 /** What pieces wait for: a batch is of one step, so it begins with choosing one. */
 export function NewBatchSteps() {
@@ -20,14 +26,23 @@ export function NewBatchSteps() {
   const clock = useClock();
   return (
     <>
-      <PageHead title="Start a batch" sub="Choose the step that pieces wait for. One batch goes to one processor for one step." />
-      {data.steps.length === 0 && <Empty says="No piece waits for an outside step." comes="Lots come here when they are made, or when the step before is done." action={<Link href="/lots">Lots</Link>} />}
+      <PageHead
+        title="Start a batch"
+        sub="Choose the step that pieces wait for. One batch goes to one processor for one step."
+      />
+      {data.steps.length === 0 && (
+        <Empty
+          says="No piece waits for an outside step."
+          comes="Lots come here when they are made, or when the step before is done."
+          action={<Link href="/lots">Lots</Link>}
+        />
+      )}
       {data.steps.length > 0 && (
         <Table label="Steps that pieces wait for" columns={COLUMNS}>
           {data.steps.map((step) => (
             <Row key={newBatchHref(step)}>
               <Cell>
-                <Link href={newBatchHref(step)} className="font-cond text-tag font-semibold">
+                <Link href={newBatchHref(step)} className="text-tag font-cond font-semibold">
                   {PROCESS_WORDS[step.process]}
                 </Link>
               </Cell>
@@ -50,7 +65,12 @@ export function NewBatchSteps() {
 }
 
 /** The address of the builder for one step. */
-export function newBatchHref({ process, specification, specificationRevision, classType }: Pick<WaitingStep, 'process' | 'specification' | 'specificationRevision' | 'classType'>): string {
+export function newBatchHref({
+  process,
+  specification,
+  specificationRevision,
+  classType,
+}: Pick<WaitingStep, 'process' | 'specification' | 'specificationRevision' | 'classType'>): string {
   const query = new URLSearchParams({ process, specification });
   if (specificationRevision !== null) query.set('specificationRevision', specificationRevision);
   if (classType !== null) query.set('classType', classType);

@@ -11,7 +11,15 @@ import type { Batch } from '@/lib/batches/contract';
 import { useBatchWrite } from './use-batch-write';
 
 /** Letting a blocker pass, with the reason that stays. */
-export function OverrideDialog({ batch, finding, onClose }: { batch: Batch; finding: BatchFinding | null; onClose: () => void }) {
+export function OverrideDialog({
+  batch,
+  finding,
+  onClose,
+}: {
+  batch: Batch;
+  finding: BatchFinding | null;
+  onClose: () => void;
+}) {
   const [reason, setReason] = useState('');
   const [wrong, setWrong] = useState<string>();
   const { run, busy } = useBatchWrite(overrideCheck, (error) => setWrong(error.problem.fields?.[0]?.message));
@@ -22,8 +30,15 @@ export function OverrideDialog({ batch, finding, onClose }: { batch: Batch; find
   };
   const pass = async () => {
     if (!finding) return;
-    if (reason.trim().length < 20) return setWrong('Say why in 20 letters or more; it prints on the traveller.');
-    const done = await run({ batchId: batch.id, version: batch.version, check: finding.code, subject: finding.subject, reason });
+    if (reason.trim().length < 20)
+      return setWrong('Say why in 20 letters or more; it prints on the traveller.');
+    const done = await run({
+      batchId: batch.id,
+      version: batch.version,
+      check: finding.code,
+      subject: finding.subject,
+      reason,
+    });
     if (!done) return;
     close();
     showMessage({ says: 'Let pass. The reason prints on the traveller.' });

@@ -8,7 +8,10 @@ import { getBatch, getBatchLines, type BatchLine } from '@/lib/batches/contract'
 import { expectedPrice } from '@/lib/batches/expected-price';
 import { amountText } from '@/lib/money';
 
-const COLUMNS = [{ says: 'For', hidden: true }, { says: 'Amount', right: true, hidden: true }];
+const COLUMNS = [
+  { says: 'For', hidden: true },
+  { says: 'Amount', right: true, hidden: true },
+];
 
 /** What the order asks for, against the lot minimum: room under it costs nothing more. */
 export function PriceSection({ batchId }: { batchId: string }) {
@@ -17,7 +20,10 @@ export function PriceSection({ batchId }: { batchId: string }) {
   const price = expectedPrice({ ...batch, lines: data.lines });
   const minimum = batch.lotMinimumMinor;
   return (
-    <Section title={batch.dispatchedAt ? 'Price of the order' : 'Price so far'} note={`${batch.currency}, as typed in`}>
+    <Section
+      title={batch.dispatchedAt ? 'Price of the order' : 'Price so far'}
+      note={`${batch.currency}, as typed in`}
+    >
       {price.totalMinor === 0 ? (
         <p className="border-b border-rule py-3 text-quiet">No price is stated yet.</p>
       ) : (
@@ -68,11 +74,25 @@ function PriceRule({ work, minimum }: { work: number; minimum: number }) {
   const number = roundStep(longest / 5);
   const to = Math.max(number, Math.ceil((longest * 1.1) / number) * number);
   const room = minimum - work;
-  const says = minimum > 0 ? `pieces ${amountText(work)}, lot minimum ${amountText(minimum)}${room > 0 ? `, room ${amountText(room)}` : ''}` : `pieces ${amountText(work)}`;
+  const says =
+    minimum > 0
+      ? `pieces ${amountText(work)}, lot minimum ${amountText(minimum)}${room > 0 ? `, room ${amountText(room)}` : ''}`
+      : `pieces ${amountText(work)}`;
   return (
     <>
-      <SteelRule width={410} to={to} tick={number / 5} number={number} value={work / 100} room says={says} {...(minimum > 0 ? { limit: { at: minimum / 100, says: `minimum ${amountText(minimum)}` } } : {})} />
-      {room > 0 && minimum > 0 && <p className="font-cond text-word text-dispatched-ink">{`room ${amountText(room)}`}</p>}
+      <SteelRule
+        width={410}
+        to={to}
+        tick={number / 5}
+        number={number}
+        value={work / 100}
+        room
+        says={says}
+        {...(minimum > 0 ? { limit: { at: minimum / 100, says: `minimum ${amountText(minimum)}` } } : {})}
+      />
+      {room > 0 && minimum > 0 && (
+        <p className="font-cond text-word text-dispatched-ink">{`room ${amountText(room)}`}</p>
+      )}
     </>
   );
 }
@@ -86,6 +106,8 @@ function roundStep(wanted: number): number {
 /** Pieces at the same price are one row. */
 function byPrice(lines: readonly BatchLine[]): { each: number; pieces: number }[] {
   const sums = new Map<number, number>();
-  for (const line of lines) if (line.unitPriceMinor > 0) sums.set(line.unitPriceMinor, (sums.get(line.unitPriceMinor) ?? 0) + line.pieces);
+  for (const line of lines)
+    if (line.unitPriceMinor > 0)
+      sums.set(line.unitPriceMinor, (sums.get(line.unitPriceMinor) ?? 0) + line.pieces);
   return [...sums].map(([each, pieces]) => ({ each, pieces }));
 }

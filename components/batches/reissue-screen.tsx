@@ -12,7 +12,13 @@ import { showMessage } from '@/components/ui/message';
 import { PageHead } from '@/components/ui/page-head';
 import { MainAndSide, Section } from '@/components/ui/section';
 import { BatchTag } from '@/components/ui/tag';
-import { getBatch, getBatchLines, type Batch, type BatchLine, type Requirement } from '@/lib/batches/contract';
+import {
+  getBatch,
+  getBatchLines,
+  type Batch,
+  type BatchLine,
+  type Requirement,
+} from '@/lib/batches/contract';
 import { reissueBatch } from '@/lib/batches/paper-contract';
 import { reissueChanges, type StatedTerms } from '@/lib/batches/reissue-changes';
 import { dayWords, type Clock } from '@/lib/day-words';
@@ -35,18 +41,53 @@ export function ReissueScreen({ batchId }: { batchId: string }) {
   const { data: batch } = useRead(getBatch, { batchId });
   const { data } = useRead(getBatchLines, { batchId });
   if (batch.dispatchedAt === null || batch.cancelledAt !== null) {
-    return <Empty says={`${batch.number} has no papers to issue anew.`} comes="A batch that is here is changed where it is built." action={<ButtonLink look="word" href={`/batches/${batchId}`}>Back to the batch</ButtonLink>} />;
+    return (
+      <Empty
+        says={`${batch.number} has no papers to issue anew.`}
+        comes="A batch that is here is changed where it is built."
+        action={
+          <ButtonLink look="word" href={`/batches/${batchId}`}>
+            Back to the batch
+          </ButtonLink>
+        }
+      />
+    );
   }
-  return <ReissueForm key={batch.version} batch={batch} lines={data.lines} requirements={data.requirements} />;
+  return (
+    <ReissueForm key={batch.version} batch={batch} lines={data.lines} requirements={data.requirements} />
+  );
 }
 
-function ReissueForm({ batch, lines, requirements }: { batch: Batch; lines: readonly BatchLine[]; requirements: readonly Requirement[] }) {
+function ReissueForm({
+  batch,
+  lines,
+  requirements,
+}: {
+  batch: Batch;
+  lines: readonly BatchLine[];
+  requirements: readonly Requirement[];
+}) {
   const router = useRouter();
   const clock = useClock();
-  const [typed, setTyped] = useState<Typed>({ wantedBackOn: batch.wantedBackOn ?? '', note: batch.note ?? '', minimum: typedAmount(batch.lotMinimumMinor), fee: typedAmount(batch.certificationFeeMinor), prices: {}, limits: {} });
+  const [typed, setTyped] = useState<Typed>({
+    wantedBackOn: batch.wantedBackOn ?? '',
+    note: batch.note ?? '',
+    minimum: typedAmount(batch.lotMinimumMinor),
+    fee: typedAmount(batch.certificationFeeMinor),
+    prices: {},
+    limits: {},
+  });
   const { run, busy } = useBatchWrite(reissueBatch);
   const set = (part: Partial<Typed>) => setTyped((was) => ({ ...was, ...part }));
-  const before: StatedTerms = { ...clock, wantedBackOn: batch.wantedBackOn, note: batch.note, lotMinimumMinor: batch.lotMinimumMinor, certificationFeeMinor: batch.certificationFeeMinor, lines, requirements };
+  const before: StatedTerms = {
+    ...clock,
+    wantedBackOn: batch.wantedBackOn,
+    note: batch.note,
+    lotMinimumMinor: batch.lotMinimumMinor,
+    certificationFeeMinor: batch.certificationFeeMinor,
+    lines,
+    requirements,
+  };
   const after = termsTyped(before, typed, clock);
   const changes = after === null ? [] : reissueChanges(before, after);
 
@@ -60,10 +101,14 @@ function ReissueForm({ batch, lines, requirements }: { batch: Batch; lines: read
       lotMinimumMinor: after.lotMinimumMinor,
       certificationFeeMinor: after.certificationFeeMinor,
       prices: after.lines.map(({ id, unitPriceMinor }) => ({ lineId: id, unitPriceMinor })),
-      requirements: after.requirements.filter((one) => typed.limits[one.id] !== undefined).map(({ id, limit, unit }) => ({ requirementId: id, limit, unit })),
+      requirements: after.requirements
+        .filter((one) => typed.limits[one.id] !== undefined)
+        .map(({ id, limit, unit }) => ({ requirementId: id, limit, unit })),
     });
     if (!done) return;
-    showMessage({ says: `${batch.number} is re-issued as version ${done.documentVersion}. The mail goes as soon as the papers are made.` });
+    showMessage({
+      says: `${batch.number} is re-issued as version ${done.documentVersion}. The mail goes as soon as the papers are made.`,
+    });
     router.push(`/batches/${batch.id}`);
   };
   return (
@@ -75,16 +120,43 @@ function ReissueForm({ batch, lines, requirements }: { batch: Batch; lines: read
         if (changes.length > 0) void send();
       }}
     >
-      <PageHead tag={<BatchTag href={`/batches/${batch.id}`} size="head" stage={batch.stage} number={batch.number} />} title="Re-issue" sub="New versions of traveller and order. The old ones stay; the processor is told what is different." />
+      <PageHead
+        tag={<BatchTag href={`/batches/${batch.id}`} size="head" stage={batch.stage} number={batch.number} />}
+        title="Re-issue"
+        sub="New versions of traveller and order. The old ones stay; the processor is told what is different."
+      />
       <MainAndSide
         main={
           <>
             <Section title="Day and terms">
               <div className="grid grid-cols-2 gap-x-4 gap-y-3 py-2 md:grid-cols-4">
-                <DateField label="Wanted back" value={typed.wantedBackOn} hint={typed.wantedBackOn === '' ? undefined : dayWords(typed.wantedBackOn, clock)} onChange={(event) => set({ wantedBackOn: event.currentTarget.value })} />
-                <NumberInput label="Lot minimum" unit={batch.currency} value={typed.minimum} error={amountFault(typed.minimum)} onChange={(event) => set({ minimum: event.currentTarget.value })} />
-                <NumberInput label="For certificates" unit={batch.currency} value={typed.fee} error={amountFault(typed.fee)} onChange={(event) => set({ fee: event.currentTarget.value })} />
-                <TextArea className="col-span-full" label="Note on traveller and order" rows={2} value={typed.note} onChange={(event) => set({ note: event.currentTarget.value })} />
+                <DateField
+                  label="Wanted back"
+                  value={typed.wantedBackOn}
+                  hint={typed.wantedBackOn === '' ? undefined : dayWords(typed.wantedBackOn, clock)}
+                  onChange={(event) => set({ wantedBackOn: event.currentTarget.value })}
+                />
+                <NumberInput
+                  label="Lot minimum"
+                  unit={batch.currency}
+                  value={typed.minimum}
+                  error={amountFault(typed.minimum)}
+                  onChange={(event) => set({ minimum: event.currentTarget.value })}
+                />
+                <NumberInput
+                  label="For certificates"
+                  unit={batch.currency}
+                  value={typed.fee}
+                  error={amountFault(typed.fee)}
+                  onChange={(event) => set({ fee: event.currentTarget.value })}
+                />
+                <TextArea
+                  className="col-span-full"
+                  label="Note on traveller and order"
+                  rows={2}
+                  value={typed.note}
+                  onChange={(event) => set({ note: event.currentTarget.value })}
+                />
               </div>
             </Section>
             <Section title="Prices" note="pieces and lots are frozen">
@@ -93,9 +165,19 @@ function ReissueForm({ batch, lines, requirements }: { batch: Batch; lines: read
                 return (
                   <div key={line.id} className="flex flex-wrap items-start gap-4 border-b border-rule py-2">
                     <span className="min-w-64 flex-1 pt-1">
-                      <span className="num font-semibold">{line.partNumber}</span> {line.partName}, {line.pieces} pc
+                      <span className="num font-semibold">{line.partNumber}</span> {line.partName},{' '}
+                      {line.pieces} pc
                     </span>
-                    <NumberInput className="w-40" label={`Line ${line.lineNo}, each`} unit={batch.currency} value={text} error={amountFault(text)} onChange={(event) => set({ prices: { ...typed.prices, [line.id]: event.currentTarget.value } })} />
+                    <NumberInput
+                      className="w-40"
+                      label={`Line ${line.lineNo}, each`}
+                      unit={batch.currency}
+                      value={text}
+                      error={amountFault(text)}
+                      onChange={(event) =>
+                        set({ prices: { ...typed.prices, [line.id]: event.currentTarget.value } })
+                      }
+                    />
                   </div>
                 );
               })}
@@ -105,12 +187,27 @@ function ReissueForm({ batch, lines, requirements }: { batch: Batch; lines: read
                 {requirements.map((one) => {
                   const now = typed.limits[one.id] ?? one;
                   const lineNo = lines.find((line) => line.id === one.lineId)?.lineNo;
-                  const change = (part: Partial<{ limit: string; unit: string }>) => set({ limits: { ...typed.limits, [one.id]: { limit: now.limit, unit: now.unit, ...part } } });
+                  const change = (part: Partial<{ limit: string; unit: string }>) =>
+                    set({
+                      limits: { ...typed.limits, [one.id]: { limit: now.limit, unit: now.unit, ...part } },
+                    });
                   const name = `${one.characteristic}${lineNo === undefined ? '' : `, line ${lineNo}`}`;
                   return (
                     <div key={one.id} className="flex flex-wrap items-start gap-3 border-b border-rule py-2">
-                      <TextField className="min-w-64 flex-1" label={name} mono value={now.limit} onChange={(event) => change({ limit: event.currentTarget.value })} />
-                      <TextField className="w-32" label="Unit" mono value={now.unit} onChange={(event) => change({ unit: event.currentTarget.value })} />
+                      <TextField
+                        className="min-w-64 flex-1"
+                        label={name}
+                        mono
+                        value={now.limit}
+                        onChange={(event) => change({ limit: event.currentTarget.value })}
+                      />
+                      <TextField
+                        className="w-32"
+                        label="Unit"
+                        mono
+                        value={now.unit}
+                        onChange={(event) => change({ unit: event.currentTarget.value })}
+                      />
                     </div>
                   );
                 })}
@@ -129,7 +226,13 @@ function ReissueForm({ batch, lines, requirements }: { batch: Batch; lines: read
               ))}
             </ul>
             <div className="flex flex-wrap gap-3 pt-4">
-              <Button look="primary" type="submit" busy={busy} busyLabel="Re-issuing" notNow={changes.length === 0 && 'Change something first.'}>
+              <Button
+                look="primary"
+                type="submit"
+                busy={busy}
+                busyLabel="Re-issuing"
+                notNow={changes.length === 0 && 'Change something first.'}
+              >
                 Re-issue and tell the processor
               </Button>
               <ButtonLink href={`/batches/${batch.id}`}>Leave it</ButtonLink>
@@ -159,7 +262,11 @@ function termsTyped(before: StatedTerms, typed: Typed, clock: Clock): StatedTerm
     note: typed.note.trim() || null,
     lotMinimumMinor: read(typed.minimum),
     certificationFeeMinor: read(typed.fee),
-    lines: before.lines.map((line) => ({ ...line, unitPriceMinor: typed.prices[line.id] === undefined ? line.unitPriceMinor : read(typed.prices[line.id] ?? '') })),
+    lines: before.lines.map((line) => ({
+      ...line,
+      unitPriceMinor:
+        typed.prices[line.id] === undefined ? line.unitPriceMinor : read(typed.prices[line.id] ?? ''),
+    })),
     requirements: before.requirements.map((one) => ({ ...one, ...typed.limits[one.id] })),
   };
 }

@@ -19,9 +19,15 @@ export function RequirementsSection({ batchId }: { batchId: string }) {
   const { data } = useRead(getBatchLines, { batchId });
   const mayBuild = useMay('batch.build') && batch.dispatchedAt === null && batch.cancelledAt === null;
   const [openId, setOpen] = useState<string | null>(null);
-  const groups = groupsOf(data.lines, data.requirements).filter((group) => mayBuild || group.requirements.length > 0);
+  const groups = groupsOf(data.lines, data.requirements).filter(
+    (group) => mayBuild || group.requirements.length > 0,
+  );
   return (
-    <Section id="requirements" title="Must be proved, on paper" note={batch.dispatchedAt ? 'frozen at dispatch' : 'from the route of each part; type over what differs'}>
+    <Section
+      id="requirements"
+      title="Must be proved, on paper"
+      note={batch.dispatchedAt ? 'frozen at dispatch' : 'from the route of each part; type over what differs'}
+    >
       {groups.length === 0 && <Empty says="No proof was asked." />}
       {groups.map((group) => {
         const opened = group.changes.find((change) => change.id === openId);
@@ -29,11 +35,22 @@ export function RequirementsSection({ batchId }: { batchId: string }) {
           <div key={group.says} className="pt-1 pb-3">
             <div className="flex flex-wrap items-baseline gap-x-4 border-b border-ink py-1">
               <h3>{group.says}</h3>
-              {group.requirements.length === 0 && !opened && <span className="text-second text-quiet">{group.isAll ? 'nothing in common' : 'nothing of its own'}</span>}
+              {group.requirements.length === 0 && !opened && (
+                <span className="text-second text-quiet">
+                  {group.isAll ? 'nothing in common' : 'nothing of its own'}
+                </span>
+              )}
               {mayBuild && !opened && <ChangeButtons group={group} open={setOpen} />}
             </div>
             {opened ? (
-              <RequirementEditor key={`${opened.id} ${batch.version}`} batch={batch} lineId={opened.lineId} says={opened.says} requirements={group.requirements} onDone={() => setOpen(null)} />
+              <RequirementEditor
+                key={`${opened.id} ${batch.version}`}
+                batch={batch}
+                lineId={opened.lineId}
+                says={opened.says}
+                requirements={group.requirements}
+                onDone={() => setOpen(null)}
+              />
             ) : (
               group.requirements.length > 0 && <Asked says={group.says} requirements={group.requirements} />
             )}
@@ -53,11 +70,24 @@ interface Group {
 }
 
 function groupsOf(lines: readonly BatchLine[], requirements: readonly Requirement[]): Group[] {
-  const all: Group = { says: 'All lines', isAll: true, requirements: requirements.filter((one) => one.lineId === null), changes: [{ id: 'all', lineId: null, says: 'All lines' }] };
+  const all: Group = {
+    says: 'All lines',
+    isAll: true,
+    requirements: requirements.filter((one) => one.lineId === null),
+    changes: [{ id: 'all', lineId: null, says: 'All lines' }],
+  };
   const same = new Map<string, { lines: BatchLine[]; requirements: readonly Requirement[] }>();
   for (const line of lines) {
     const own = requirements.filter((one) => one.lineId === line.id);
-    const key = JSON.stringify(own.map(({ characteristic, limit, unit, source, sourceText }) => [characteristic, limit, unit, source, sourceText]));
+    const key = JSON.stringify(
+      own.map(({ characteristic, limit, unit, source, sourceText }) => [
+        characteristic,
+        limit,
+        unit,
+        source,
+        sourceText,
+      ]),
+    );
     const known = same.get(key);
     if (known) known.lines.push(line);
     else same.set(key, { lines: [line], requirements: own });
@@ -78,7 +108,12 @@ function ChangeButtons({ group, open }: { group: Group; open: (id: string) => vo
   return (
     <span className="ml-auto flex flex-wrap gap-x-4">
       {group.changes.map((change) => (
-        <Button key={change.id} look="word" aria-label={`${verb}: ${change.says}`} onClick={() => open(change.id)}>
+        <Button
+          key={change.id}
+          look="word"
+          aria-label={`${verb}: ${change.says}`}
+          onClick={() => open(change.id)}
+        >
           {group.changes.length === 1 ? verb : `${verb} ${change.says.toLowerCase()}`}
         </Button>
       ))}
@@ -88,7 +123,11 @@ function ChangeButtons({ group, open }: { group: Group; open: (id: string) => vo
 
 function Asked({ says, requirements }: { says: string; requirements: readonly Requirement[] }) {
   return (
-    <Table label={`Must be proved: ${says}`} columns={COLUMNS.map((column) => ({ ...column, hidden: true }))} dense>
+    <Table
+      label={`Must be proved: ${says}`}
+      columns={COLUMNS.map((column) => ({ ...column, hidden: true }))}
+      dense
+    >
       {requirements.map((one) => (
         <Row key={one.id}>
           <Cell className="w-2/5">{one.characteristic}</Cell>

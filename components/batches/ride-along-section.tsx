@@ -25,11 +25,25 @@ export function RideAlongSection({ batchId }: { batchId: string }) {
   const units = useMe()?.units ?? 'inch';
   const { process, step } = batch;
   const { specification, specificationRevision, classType } = step;
-  const asked = { process, specification, ...(specificationRevision === null ? {} : { specificationRevision }), ...(classType === null ? {} : { classType }), besideBatchId: batchId };
+  const asked = {
+    process,
+    specification,
+    ...(specificationRevision === null ? {} : { specificationRevision }),
+    ...(classType === null ? {} : { classType }),
+    besideBatchId: batchId,
+  };
   const lots = usePages(listWaitingLots, asked);
   const rows = lots.data?.pages.flatMap((page) => page.rows) ?? [];
   const room = expectedPrice({ ...batch, lines: held.lines }).toMinimumMinor;
-  const columns = [{ says: 'Lot' }, { says: 'Part' }, { says: 'Material' }, { says: 'Condition' }, { says: 'Pieces', right: true }, { says: `Mass, ${massUnit(units)}`, right: true }, { says: 'Add', hidden: true }];
+  const columns = [
+    { says: 'Lot' },
+    { says: 'Part' },
+    { says: 'Material' },
+    { says: 'Condition' },
+    { says: 'Pieces', right: true },
+    { says: `Mass, ${massUnit(units)}`, right: true },
+    { says: 'Add', hidden: true },
+  ];
   return (
     <Section
       id="ride-along"
@@ -72,14 +86,20 @@ function RideAlong({ batch, row, units }: { batch: Batch; row: WaitingLot; units
         </Link>
       </Cell>
       <Cell>
-        <span className="num font-semibold">{row.partNumber}</span> <span className="text-quiet">rev</span> <span className="num">{row.partRevision}</span> {row.partName}
-        {row.partSuperseded && <span className="block text-source text-dispatched-ink">superseded drawing</span>}
+        <span className="num font-semibold">{row.partNumber}</span> <span className="text-quiet">rev</span>{' '}
+        <span className="num">{row.partRevision}</span> {row.partName}
+        {row.partSuperseded && (
+          <span className="block text-source text-dispatched-ink">superseded drawing</span>
+        )}
       </Cell>
       <Cell head="Material">
-        <span className="font-cond">{row.material}</span> <span className="num whitespace-nowrap">{row.thickness}</span>
+        <span className="font-cond">{row.material}</span>{' '}
+        <span className="num whitespace-nowrap">{row.thickness}</span>
       </Cell>
       <Cell code head="Condition" className="whitespace-nowrap">
-        {row.conditionBefore} {row.conditionBefore && row.targetCondition && <span className="font-cond text-faint">to</span>} {row.targetCondition}
+        {row.conditionBefore}{' '}
+        {row.conditionBefore && row.targetCondition && <span className="font-cond text-faint">to</span>}{' '}
+        {row.targetCondition}
       </Cell>
       <Cell figure head="Pieces">
         {row.pieces.toLocaleString('en-US')}

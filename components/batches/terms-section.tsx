@@ -20,7 +20,11 @@ export function TermsSection({ batchId }: { batchId: string }) {
   const mayBuild = useMay('batch.build');
   return (
     <Section id="terms" title="Days and terms">
-      {mayBuild ? <TermsForm key={batch.version} batch={batch} /> : <p className="py-3 text-quiet">{batch.note ?? 'No note.'}</p>}
+      {mayBuild ? (
+        <TermsForm key={batch.version} batch={batch} />
+      ) : (
+        <p className="py-3 text-quiet">{batch.note ?? 'No note.'}</p>
+      )}
     </Section>
   );
 }
@@ -40,16 +44,26 @@ const orNothing = (typed: string) => (typed.trim() === '' ? '0' : typed);
 
 function TermsForm({ batch }: { batch: Batch }) {
   const clock = useClock();
-  const { data: known } = useRead(listStepProcessors, { process: batch.process, specification: batch.step.specification });
+  const { data: known } = useRead(listStepProcessors, {
+    process: batch.process,
+    specification: batch.step.specification,
+  });
   const [typed, setTyped] = useState(typedOf(batch));
   const [wrong, setWrong] = useState<Readonly<Record<string, string>>>({});
-  const { run, busy } = useBatchWrite(updateBatch, (error) => setWrong(Object.fromEntries((error.problem.fields ?? []).map(({ field, message }) => [field, message]))));
+  const { run, busy } = useBatchWrite(updateBatch, (error) =>
+    setWrong(Object.fromEntries((error.problem.fields ?? []).map(({ field, message }) => [field, message]))),
+  );
   const isSame = JSON.stringify(typed) === JSON.stringify(typedOf(batch));
   const set = (part: Partial<typeof typed>) => setTyped((was) => ({ ...was, ...part }));
   const inWords = (day: string) => (day === '' ? undefined : dayWords(day, clock));
-  const processors = known.processors.map((one) => ({ value: one.processorId, says: one.approved ? one.name : `${one.name}: ${one.says}` }));
+  const processors = known.processors.map((one) => ({
+    value: one.processorId,
+    says: one.approved ? one.name : `${one.name}: ${one.says}`,
+  }));
   // A processor one no longer works with is not in the list, but the batch still names it.
-  const options = processors.some((one) => one.value === batch.processorId) ? processors : [{ value: batch.processorId, says: batch.processor }, ...processors];
+  const options = processors.some((one) => one.value === batch.processorId)
+    ? processors
+    : [{ value: batch.processorId, says: batch.processor }, ...processors];
 
   const save = async () => {
     const [minimum, fee] = [Minimum.safeParse(orNothing(typed.minimum)), Fee.safeParse(orNothing(typed.fee))];
@@ -80,12 +94,50 @@ function TermsForm({ batch }: { batch: Batch }) {
         void save();
       }}
     >
-      <SelectField className="col-span-2" label="Processor" options={options} value={typed.processorId} error={wrong['processorId']} onChange={(event) => set({ processorId: event.currentTarget.value })} />
-      <DateField label="Leaves" value={typed.leavesOn} hint={inWords(typed.leavesOn)} error={wrong['leavesOn']} onChange={(event) => set({ leavesOn: event.currentTarget.value })} />
-      <DateField label="Wanted back" value={typed.wantedBackOn} hint={inWords(typed.wantedBackOn)} error={wrong['wantedBackOn']} onChange={(event) => set({ wantedBackOn: event.currentTarget.value })} />
-      <NumberInput label="Lot minimum" unit={batch.currency} value={typed.minimum} error={wrong['lotMinimumMinor']} onChange={(event) => set({ minimum: event.currentTarget.value })} />
-      <NumberInput label="For certificates" unit={batch.currency} value={typed.fee} error={wrong['certificationFeeMinor']} onChange={(event) => set({ fee: event.currentTarget.value })} />
-      <TextArea className="col-span-2" label="Note on traveller and order" rows={2} value={typed.note} error={wrong['note']} onChange={(event) => set({ note: event.currentTarget.value })} />
+      <SelectField
+        className="col-span-2"
+        label="Processor"
+        options={options}
+        value={typed.processorId}
+        error={wrong['processorId']}
+        onChange={(event) => set({ processorId: event.currentTarget.value })}
+      />
+      <DateField
+        label="Leaves"
+        value={typed.leavesOn}
+        hint={inWords(typed.leavesOn)}
+        error={wrong['leavesOn']}
+        onChange={(event) => set({ leavesOn: event.currentTarget.value })}
+      />
+      <DateField
+        label="Wanted back"
+        value={typed.wantedBackOn}
+        hint={inWords(typed.wantedBackOn)}
+        error={wrong['wantedBackOn']}
+        onChange={(event) => set({ wantedBackOn: event.currentTarget.value })}
+      />
+      <NumberInput
+        label="Lot minimum"
+        unit={batch.currency}
+        value={typed.minimum}
+        error={wrong['lotMinimumMinor']}
+        onChange={(event) => set({ minimum: event.currentTarget.value })}
+      />
+      <NumberInput
+        label="For certificates"
+        unit={batch.currency}
+        value={typed.fee}
+        error={wrong['certificationFeeMinor']}
+        onChange={(event) => set({ fee: event.currentTarget.value })}
+      />
+      <TextArea
+        className="col-span-2"
+        label="Note on traveller and order"
+        rows={2}
+        value={typed.note}
+        error={wrong['note']}
+        onChange={(event) => set({ note: event.currentTarget.value })}
+      />
       <div className="col-span-full">
         <Button type="submit" busy={busy} busyLabel="Keeping" notNow={isSame && 'Nothing is changed yet.'}>
           Keep days and terms

@@ -19,12 +19,21 @@ export function TravellerScreen({ batchId }: { batchId: string }) {
       <PageHead
         tag={<BatchTag href={`/batches/${batchId}`} size="head" stage={batch.stage} number={batch.number} />}
         title="Traveller"
-        sub={says.documentVersion === 0 ? 'A draft: the paper with its code is made when the batch is dispatched.' : `Version ${says.documentVersion}, as it was stated.`}
+        sub={
+          says.documentVersion === 0
+            ? 'A draft: the paper with its code is made when the batch is dispatched.'
+            : `Version ${says.documentVersion}, as it was stated.`
+        }
         actions={
           <>
             <ButtonLink href={`/batches/${batchId}`}>Back to the batch</ButtonLink>
             {paper?.fileId && (
-              <ButtonLink look="primary" href={`/api/files/${paper.fileId}/content?inline=1`} target="_blank" prefetch={false}>
+              <ButtonLink
+                look="primary"
+                href={`/api/files/${paper.fileId}/content?inline=1`}
+                target="_blank"
+                prefetch={false}
+              >
                 Open the paper
               </ButtonLink>
             )}

@@ -30,7 +30,12 @@ export function TravellerSection({ batchId }: { batchId: string }) {
         }
       >
         <div className="h-56 overflow-hidden border-b-heavy border-ink bg-bench px-5 pt-3.5">
-          <Link href={`/batches/${batchId}/traveller`} tabIndex={-1} aria-hidden="true" className="no-underline">
+          <Link
+            href={`/batches/${batchId}/traveller`}
+            tabIndex={-1}
+            aria-hidden="true"
+            className="no-underline"
+          >
             {says && <TravellerSheet says={says} small />}
           </Link>
         </div>
@@ -44,8 +49,13 @@ const KINDS = { traveller: 'Traveller', purchase_order: 'Order' } as const;
 function Papers({ batchId }: { batchId: string }) {
   const clock = useClock();
   // Asked again only while the worker still makes one.
-  const waiting = useLazyRead(listBatchDocuments, { batchId }).data?.documents.some((one) => one.fileId === null) ?? true;
-  const { data } = useLazyRead(listBatchDocuments, { batchId }, waiting ? { refreshEveryMs: 2 * SECONDS } : {});
+  const waiting =
+    useLazyRead(listBatchDocuments, { batchId }).data?.documents.some((one) => one.fileId === null) ?? true;
+  const { data } = useLazyRead(
+    listBatchDocuments,
+    { batchId },
+    waiting ? { refreshEveryMs: 2 * SECONDS } : {},
+  );
   return (
     <Section title="Papers" note="every version stays">
       <ul aria-label="Papers">
@@ -57,13 +67,24 @@ function Papers({ batchId }: { batchId: string }) {
   );
 }
 
-function Paper({ document: { kind, documentVersion, fileId, sha256, statedAt, changes }, clock }: { document: BatchDocument; clock: Clock }) {
+function Paper({
+  document: { kind, documentVersion, fileId, sha256, statedAt, changes },
+  clock,
+}: {
+  document: BatchDocument;
+  clock: Clock;
+}) {
   const name = `${KINDS[kind]}, version ${documentVersion}`;
   return (
     <li className="border-b border-rule py-[7px] text-second">
       <div className="flex flex-wrap items-baseline gap-x-3">
         {fileId ? (
-          <a href={`/api/files/${fileId}/content?inline=1`} target="_blank" rel="noreferrer" className="font-semibold">
+          <a
+            href={`/api/files/${fileId}/content?inline=1`}
+            target="_blank"
+            rel="noreferrer"
+            className="font-semibold"
+          >
             {name}
           </a>
         ) : (
@@ -78,7 +99,9 @@ function Paper({ document: { kind, documentVersion, fileId, sha256, statedAt, ch
       {changes.map((change) => (
         <div key={change}>{change}</div>
       ))}
-      {sha256 && <div className="num text-source text-faint">{`sha-256 ${sha256.slice(0, 4)} ${sha256.slice(4, 8)} … ${sha256.slice(-4)}`}</div>}
+      {sha256 && (
+        <div className="num text-source text-faint">{`sha-256 ${sha256.slice(0, 4)} ${sha256.slice(4, 8)} … ${sha256.slice(-4)}`}</div>
+      )}
     </li>
   );
 }

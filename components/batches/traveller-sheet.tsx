@@ -11,25 +11,56 @@ export function TravellerSheet({ says, small = false }: { says: TravellerSays; s
   const pieces = says.lines.reduce((sum, line) => sum + line.pieces, 0);
   const version = says.documentVersion === 0 ? 'draft' : `version ${says.documentVersion}`;
   return (
-    <div className={`lw-sheet border border-rule bg-white text-[#1e2326] ${small ? 'p-3 text-[9px] leading-3' : 'mx-auto max-w-[816px] p-6 text-row md:p-9'}`}>
+    <div
+      className={`lw-sheet border border-rule bg-white text-[#1e2326] ${small ? 'p-3 text-[9px] leading-3' : 'mx-auto max-w-[816px] p-6 text-row md:p-9'}`}
+    >
       <div className="flex items-center border-heavy border-current px-3 py-1">
         <span className={`rounded-full border-heavy border-current ${small ? 'size-2.5' : 'size-6'}`} />
-        <span className={`pl-3 font-mono font-semibold ${small ? 'text-[15px]' : 'text-[2.2rem] leading-10'}`}>{says.number}</span>
-        <span className={`ml-auto font-cond ${small ? 'text-[10px]' : 'text-word'}`}>{`Traveller, ${version}`}</span>
+        <span
+          className={`pl-3 font-mono font-semibold ${small ? 'text-[15px]' : 'text-[2.2rem] leading-10'}`}
+        >
+          {says.number}
+        </span>
+        <span
+          className={`ml-auto font-cond ${small ? 'text-[10px]' : 'text-word'}`}
+        >{`Traveller, ${version}`}</span>
       </div>
       <p className={small ? 'mt-1.5' : 'mt-4'}>
-        <span className="font-semibold">{says.processor.name}</span>, from {says.shop.name}. Order <span className="font-mono">{says.orderNumber}</span>.{says.wantedBackOn && ` Wanted back ${day(says.wantedBackOn)}.`}
+        <span className="font-semibold">{says.processor.name}</span>, from {says.shop.name}. Order{' '}
+        <span className="font-mono">{says.orderNumber}</span>.
+        {says.wantedBackOn && ` Wanted back ${day(says.wantedBackOn)}.`}
         <br />
         {PROCESS_WORDS[says.process]}, {says.specification}. {pieces.toLocaleString('en-US')} pieces.
       </p>
-      {says.changes.length > 0 && <p className="mt-2 border-l-4 border-current pl-2">{`Different from version ${says.documentVersion - 1}: ${says.changes.join('; ')}.`}</p>}
+      {says.changes.length > 0 && (
+        <p className="mt-2 border-l-4 border-current pl-2">{`Different from version ${says.documentVersion - 1}: ${says.changes.join('; ')}.`}</p>
+      )}
       <SheetLines lines={says.lines} small={small} />
       {says.note && <p className="mt-2">{says.note}</p>}
       <div className={small ? 'mt-1.5' : 'mt-5 grid gap-6 md:grid-cols-2'}>
-        <SheetList title="Must be proved" small={small} items={says.requirements.map((one) => `${one.characteristic} ${[one.limit, one.unit].filter(Boolean).join(' ')}${one.lines.length > 0 ? `, ${one.lines.length === 1 ? 'line' : 'lines'} ${one.lines.join(', ')}` : ''}`)} />
-        <SheetList title="Cautions" small={small} items={[...says.cautions, ...says.overrides.map((one) => `Let pass: ${one.what}. ${one.reason} ${one.by}.`)]} />
+        <SheetList
+          title="Must be proved"
+          small={small}
+          items={says.requirements.map(
+            (one) =>
+              `${one.characteristic} ${[one.limit, one.unit].filter(Boolean).join(' ')}${one.lines.length > 0 ? `, ${one.lines.length === 1 ? 'line' : 'lines'} ${one.lines.join(', ')}` : ''}`,
+          )}
+        />
+        <SheetList
+          title="Cautions"
+          small={small}
+          items={[
+            ...says.cautions,
+            ...says.overrides.map((one) => `Let pass: ${one.what}. ${one.reason} ${one.by}.`),
+          ]}
+        />
       </div>
-      {!small && <p className="mt-5 text-source">The drawing, the order and the governing specification at the revision named come first, then this page. It releases nothing by itself.</p>}
+      {!small && (
+        <p className="mt-5 text-source">
+          The drawing, the order and the governing specification at the revision named come first, then this
+          page. It releases nothing by itself.
+        </p>
+      )}
     </div>
   );
 }
@@ -42,11 +73,13 @@ function SheetLines({ lines, small }: { lines: TravellerSays['lines']; small: bo
         {!small && (
           <thead>
             <tr className="border-b border-current font-cond text-caption">
-              {['', 'Lot', 'Part and revision', '', 'Material, heat', 'Thickness', 'From, to', 'Pieces'].map((name, at) => (
-                <th key={at} scope="col" className="pr-3 font-normal">
-                  {name || <span className="sr-only">{at === 0 ? 'Line' : 'Name'}</span>}
-                </th>
-              ))}
+              {['', 'Lot', 'Part and revision', '', 'Material, heat', 'Thickness', 'From, to', 'Pieces'].map(
+                (name, at) => (
+                  <th key={at} scope="col" className="pr-3 font-normal">
+                    {name || <span className="sr-only">{at === 0 ? 'Line' : 'Name'}</span>}
+                  </th>
+                ),
+              )}
             </tr>
           </thead>
         )}
@@ -63,7 +96,9 @@ function SheetLines({ lines, small }: { lines: TravellerSays['lines']; small: bo
                 </td>
               )}
               <td className={`${cell} font-mono`}>{line.thickness}</td>
-              <td className={`${cell} font-mono`}>{[line.conditionBefore, line.targetCondition].filter(Boolean).join(small ? '-' : ' to ')}</td>
+              <td className={`${cell} font-mono`}>
+                {[line.conditionBefore, line.targetCondition].filter(Boolean).join(small ? '-' : ' to ')}
+              </td>
               <td className={`${cell} text-right font-mono`}>{line.pieces}</td>
             </tr>
           ))}
@@ -77,7 +112,8 @@ function SheetList({ title, items, small }: { title: string; items: readonly str
   if (small) {
     return (
       <p>
-        <span className="font-semibold">{title}:</span> {items.map((item) => (item.endsWith('.') ? item : `${item}.`)).join(' ')}
+        <span className="font-semibold">{title}:</span>{' '}
+        {items.map((item) => (item.endsWith('.') ? item : `${item}.`)).join(' ')}
       </p>
     );
   }

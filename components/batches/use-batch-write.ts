@@ -13,7 +13,18 @@ import { getTraveller, listBatchDocuments } from '@/lib/batches/paper-contract';
 import { listWaitingLots, listWaitingSteps } from '@/lib/batches/waiting-contract';
 import { getGate } from '@/lib/stock/contract';
 
-const SHOWN = [getBatch, getBatchLines, getBatchChecks, getTraveller, listBatchDocuments, listBatches, listWaitingLots, listWaitingSteps, listAudit, getGate];
+const SHOWN = [
+  getBatch,
+  getBatchLines,
+  getBatchChecks,
+  getTraveller,
+  listBatchDocuments,
+  listBatches,
+  listWaitingLots,
+  listWaitingSteps,
+  listAudit,
+  getGate,
+];
 
 /** One write about a batch: afterwards all that shows it is fresh. A refusal is told, and what it is now is fetched. */
 export function useBatchWrite<D extends Declaration>(declaration: D, onRefused?: (error: ApiError) => void) {
@@ -31,7 +42,12 @@ export function useBatchWrite<D extends Declaration>(declaration: D, onRefused?:
       if (!(error instanceof ApiError)) throw error;
       if (onRefused && (error.problem.fields ?? []).length > 0) onRefused(error);
       else showMessage({ says: error.message, failed: true });
-      if (error.problem.status === 409) await Promise.all([getBatch, getBatchLines, getBatchChecks].map((read) => cache.invalidateQueries({ queryKey: [read.id] })));
+      if (error.problem.status === 409)
+        await Promise.all(
+          [getBatch, getBatchLines, getBatchChecks].map((read) =>
+            cache.invalidateQueries({ queryKey: [read.id] }),
+          ),
+        );
       return null;
     } finally {
       running.current = false;

@@ -25,12 +25,30 @@ export function AskForm({ batchId, processor, lineId, body: begun, onDone }: Ask
     event.preventDefault();
     const done = await write.mutateAsync({ batchId, kind: 'question', body, lineId }).catch(() => null);
     if (!done) return;
-    showMessage({ says: `${processor} is asked, by mail and in the thread of the batch.`, action: { says: 'Open the thread', href: `/batches/${batchId}#messages` } });
+    showMessage({
+      says: `${processor} is asked, by mail and in the thread of the batch.`,
+      action: { says: 'Open the thread', href: `/batches/${batchId}#messages` },
+    });
     onDone();
   };
   return (
-    <form noValidate onSubmit={ask} aria-label={`Ask ${processor}`} className="flex max-w-prose flex-col gap-2.5">
-      <TextArea label={`To ${processor}`} rows={2} value={body} maxLength={4000} autoFocus error={write.error ? (write.error.problem.fields?.[0]?.message ?? write.error.problem.title) : undefined} onChange={(event) => setBody(event.currentTarget.value)} />
+    <form
+      noValidate
+      onSubmit={ask}
+      aria-label={`Ask ${processor}`}
+      className="flex max-w-prose flex-col gap-2.5"
+    >
+      <TextArea
+        label={`To ${processor}`}
+        rows={2}
+        value={body}
+        maxLength={4000}
+        autoFocus
+        error={
+          write.error ? (write.error.problem.fields?.[0]?.message ?? write.error.problem.title) : undefined
+        }
+        onChange={(event) => setBody(event.currentTarget.value)}
+      />
       <div className="flex flex-wrap gap-2">
         <Button type="submit" busy={write.isPending} busyLabel="Asking">
           Ask {processor} to correct

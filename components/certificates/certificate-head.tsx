@@ -9,7 +9,12 @@ import { useClock } from '@/components/session/use-me';
 import { Button } from '@/components/ui/button';
 import { Day } from '@/components/ui/day';
 import { DateField, TextField } from '@/components/ui/field';
-import { getCertificate, listCertificates, RecordCertificate, recordCertificate } from '@/lib/certificates/contract';
+import {
+  getCertificate,
+  listCertificates,
+  RecordCertificate,
+  recordCertificate,
+} from '@/lib/certificates/contract';
 
 import { SetAsideForm } from './set-aside-form';
 import type { Proving } from './use-proving';
@@ -49,11 +54,19 @@ const Fields = RecordCertificate.pick({ number: true, datedOn: true });
 
 function NumberAndDate({ proving }: { proving: Proving }) {
   const { certificate } = proving.data;
-  const form = useForm({ resolver: zodResolver(Fields), defaultValues: { number: certificate.number ?? '', datedOn: certificate.datedOn ?? '' } });
+  const form = useForm({
+    resolver: zodResolver(Fields),
+    defaultValues: { number: certificate.number ?? '', datedOn: certificate.datedOn ?? '' },
+  });
   const write = useWrite(recordCertificate, { refreshes: [getCertificate, listCertificates] });
   const { errors, isDirty } = form.formState;
   const keep = form.handleSubmit(async (values) => {
-    await write.mutateAsync({ certificateId: certificate.id, version: certificate.version, ...values }, { onError: showOnForm(form), onSuccess: () => form.reset(values) }).catch(() => undefined);
+    await write
+      .mutateAsync(
+        { certificateId: certificate.id, version: certificate.version, ...values },
+        { onError: showOnForm(form), onSuccess: () => form.reset(values) },
+      )
+      .catch(() => undefined);
   });
   const keepWhenWhole = () => {
     const { number, datedOn } = form.getValues();
@@ -61,16 +74,36 @@ function NumberAndDate({ proving }: { proving: Proving }) {
   };
   return (
     <form noValidate onSubmit={keep} onBlur={keepWhenWhole} className="flex flex-wrap items-start gap-3">
-      <TextField className="w-56 max-md:w-full" label="Certificate number" mono error={errors.number?.message} {...form.register('number')} />
-      <DateField className="w-44 max-md:w-full" label="Date on it" error={errors.datedOn?.message} {...form.register('datedOn')} />
-      <span className="pt-[27px] max-md:pt-0 text-second text-quiet" role="status">
-        {errors.root?.message ?? savedWords({ isDirty, isPending: write.isPending, isThere: certificate.number !== null })}
+      <TextField
+        className="w-56 max-md:w-full"
+        label="Certificate number"
+        mono
+        error={errors.number?.message}
+        {...form.register('number')}
+      />
+      <DateField
+        className="w-44 max-md:w-full"
+        label="Date on it"
+        error={errors.datedOn?.message}
+        {...form.register('datedOn')}
+      />
+      <span className="pt-[27px] text-second text-quiet max-md:pt-0" role="status">
+        {errors.root?.message ??
+          savedWords({ isDirty, isPending: write.isPending, isThere: certificate.number !== null })}
       </span>
     </form>
   );
 }
 
-function savedWords({ isDirty, isPending, isThere }: { isDirty: boolean; isPending: boolean; isThere: boolean }): string {
+function savedWords({
+  isDirty,
+  isPending,
+  isThere,
+}: {
+  isDirty: boolean;
+  isPending: boolean;
+  isThere: boolean;
+}): string {
   if (isPending) return 'Keeping';
   if (isDirty) return 'not kept yet';
   return isThere ? 'kept' : 'as printed on it';

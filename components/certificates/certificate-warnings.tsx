@@ -19,14 +19,28 @@ export function CertificateWarnings({ proving: { data, mayProve } }: { proving: 
     <>
       {!nothing && (
         <CheckList label="Before you begin">
-          {!file.verified && <CheckRow level="stop" sentence={`${file.name} did not arrive whole.`} rest="Nobody can sign for it. Ask for it again." />}
+          {!file.verified && (
+            <CheckRow
+              level="stop"
+              sentence={`${file.name} did not arrive whole.`}
+              rest="Nobody can sign for it. Ask for it again."
+            />
+          )}
           {certificate.setAsideAt !== null && <SetAsideRow certificate={certificate} mayProve={mayProve} />}
           {sameFile.map((same) => (
             <CheckRow
               key={same.certificateId}
               level="warn"
-              sentence={same.sameBatch ? 'The very same file is in this batch already.' : `The very same file was sent for ${same.batchNumber}.`}
-              rest={same.sameBatch ? 'One of the two is a second copy: set it aside.' : `Look whether it is of ${batch.number} at all.${same.signed ? ` It is signed for ${same.batchNumber}.` : ''}`}
+              sentence={
+                same.sameBatch
+                  ? 'The very same file is in this batch already.'
+                  : `The very same file was sent for ${same.batchNumber}.`
+              }
+              rest={
+                same.sameBatch
+                  ? 'One of the two is a second copy: set it aside.'
+                  : `Look whether it is of ${batch.number} at all.${same.signed ? ` It is signed for ${same.batchNumber}.` : ''}`
+              }
               waysOut={
                 <Link href={`/certificates/${same.certificateId}`} className="lw-word-button">
                   Open the other
@@ -42,7 +56,8 @@ export function CertificateWarnings({ proving: { data, mayProve } }: { proving: 
           {others.map((other, at) => (
             <span key={other.id}>
               {at > 0 && ', '}
-              <Link href={`/certificates/${other.id}`}>{certificateName(other)}</Link> <span className="text-quiet">{STATE_WORDS[other.state]}</span>
+              <Link href={`/certificates/${other.id}`}>{certificateName(other)}</Link>{' '}
+              <span className="text-quiet">{STATE_WORDS[other.state]}</span>
             </span>
           ))}
         </p>
@@ -51,7 +66,13 @@ export function CertificateWarnings({ proving: { data, mayProve } }: { proving: 
   );
 }
 
-function SetAsideRow({ certificate, mayProve }: { certificate: Proving['data']['certificate']; mayProve: boolean }) {
+function SetAsideRow({
+  certificate,
+  mayProve,
+}: {
+  certificate: Proving['data']['certificate'];
+  mayProve: boolean;
+}) {
   const clock = useClock();
   const takeUp = useWrite(takeUpCertificate, { refreshes: [getCertificate, listCertificates] });
   return (
@@ -60,12 +81,20 @@ function SetAsideRow({ certificate, mayProve }: { certificate: Proving['data']['
       sentence="This certificate is set aside."
       rest={
         <>
-          {certificate.setAsideReason}. {certificate.setAsideAt && <Moment at={new Date(certificate.setAsideAt)} clock={clock} />}
+          {certificate.setAsideReason}.{' '}
+          {certificate.setAsideAt && <Moment at={new Date(certificate.setAsideAt)} clock={clock} />}
         </>
       }
       waysOut={
         mayProve && (
-          <Button look="word" onClick={() => takeUp.mutateAsync({ certificateId: certificate.id, version: certificate.version }).catch(() => undefined)}>
+          <Button
+            look="word"
+            onClick={() =>
+              takeUp
+                .mutateAsync({ certificateId: certificate.id, version: certificate.version })
+                .catch(() => undefined)
+            }
+          >
             Take it up again
           </Button>
         )

@@ -15,23 +15,52 @@ import { listCertificates, type CertificateRow } from '@/lib/certificates/contra
 
 import { certificateName, STATE_WORDS } from './certificate-words';
 
-const COLUMNS = [{ says: 'Certificate' }, { says: 'Dated' }, { says: 'Batch' }, { says: 'From' }, { says: 'Came' }, { says: 'Decided', right: true }, { says: 'Covers', right: true }, { says: 'State' }];
+const COLUMNS = [
+  { says: 'Certificate' },
+  { says: 'Dated' },
+  { says: 'Batch' },
+  { says: 'From' },
+  { says: 'Came' },
+  { says: 'Decided', right: true },
+  { says: 'Covers', right: true },
+  { says: 'State' },
+];
 
 /** What waits to be proved, then what was. */
 export function CertificatesScreen() {
-  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listCertificates, {});
+  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(
+    listCertificates,
+    {},
+  );
   const rows = data?.pages.flatMap((page) => page.rows) ?? [];
   const waiting = rows.filter((row) => row.state === 'waiting');
   const done = rows.filter((row) => row.state !== 'waiting');
   return (
     <>
-      <PageHead title="Certificates" sub={isPending ? undefined : waitingWords(waiting.length)} actions={<><ButtonLink href="/receive">Count in</ButtonLink><ButtonLink href="/nonconformances">Nonconformances</ButtonLink></>} />
+      <PageHead
+        title="Certificates"
+        sub={isPending ? undefined : waitingWords(waiting.length)}
+        actions={
+          <>
+            <ButtonLink href="/receive">Count in</ButtonLink>
+            <ButtonLink href="/nonconformances">Nonconformances</ButtonLink>
+          </>
+        }
+      />
       {isPending && <Loading label="Loading certificates" rows={8} />}
       {error && <Failing says="The certificates could not be read." again={error.message} />}
-      {data && rows.length === 0 && <Empty says="No certificate has come yet." comes="A processor sends them from the link in the dispatch mail; one that came on paper is added at its batch." action={<Link href="/batches">To the batches</Link>} />}
+      {data && rows.length === 0 && (
+        <Empty
+          says="No certificate has come yet."
+          comes="A processor sends them from the link in the dispatch mail; one that came on paper is added at its batch."
+          action={<Link href="/batches">To the batches</Link>}
+        />
+      )}
       {rows.length > 0 && (
         <Table label="Certificates" columns={COLUMNS}>
-          {waiting.length > 0 && <GroupRow says="Waiting to be proved" count={waiting.length} span={COLUMNS.length} />}
+          {waiting.length > 0 && (
+            <GroupRow says="Waiting to be proved" count={waiting.length} span={COLUMNS.length} />
+          )}
           {waiting.map((row) => (
             <CertificateLine key={row.id} row={row} />
           ))}
@@ -43,7 +72,12 @@ export function CertificatesScreen() {
       )}
       {hasNextPage && (
         <div className="pt-3">
-          <Button size="small" busy={isFetchingNextPage} busyLabel="Reading on" onClick={() => fetchNextPage().then(() => undefined)}>
+          <Button
+            size="small"
+            busy={isFetchingNextPage}
+            busyLabel="Reading on"
+            onClick={() => fetchNextPage().then(() => undefined)}
+          >
             Show more
           </Button>
         </div>

@@ -17,7 +17,13 @@ import { addCertificate, listCertificates } from '@/lib/certificates/contract';
 
 import { certificateName, STATE_WORDS } from './certificate-words';
 
-const COLUMNS = [{ says: 'Certificate' }, { says: 'Came' }, { says: 'Decided', right: true }, { says: 'Covers', right: true }, { says: 'State' }];
+const COLUMNS = [
+  { says: 'Certificate' },
+  { says: 'Came' },
+  { says: 'Decided', right: true },
+  { says: 'Covers', right: true },
+  { says: 'State' },
+];
 
 /** The certificates of one batch, on its page. */
 export function CertificatesSection({ batchId, dispatched }: { batchId: string; dispatched: boolean }) {
@@ -29,7 +35,16 @@ export function CertificatesSection({ batchId, dispatched }: { batchId: string; 
     <Section id="certificates" title="Certificates" note={rows.length > 0 ? rows.length : undefined}>
       {isPending && <Loading rows={2} label="Loading certificates" />}
       {error && <Failing says="The certificates could not be read." again={error.message} />}
-      {data && rows.length === 0 && <Empty says="No certificate yet." comes={dispatched ? 'The processor sends it from its page; add one here that came on paper.' : 'It comes after the batch has left.'} />}
+      {data && rows.length === 0 && (
+        <Empty
+          says="No certificate yet."
+          comes={
+            dispatched
+              ? 'The processor sends it from its page; add one here that came on paper.'
+              : 'It comes after the batch has left.'
+          }
+        />
+      )}
       {rows.length > 0 && (
         <Table label="Certificates of this batch" columns={COLUMNS}>
           {rows.map((row) => (
@@ -71,14 +86,27 @@ function AddCertificate({ batchId }: { batchId: string }) {
     );
   }
   const add = async (fileId: string) => {
-    const done = await write.mutateAsync({ batchId, fileId }).catch((problem: unknown) => showMessage({ says: problem instanceof Error ? problem.message : 'Not added.', failed: true }));
+    const done = await write
+      .mutateAsync({ batchId, fileId })
+      .catch((problem: unknown) =>
+        showMessage({ says: problem instanceof Error ? problem.message : 'Not added.', failed: true }),
+      );
     if (!done) return;
     setOpen(false);
-    showMessage({ says: 'The certificate is added and waits to be proved.', action: { says: 'Prove it', href: `/certificates/${done.id}` } });
+    showMessage({
+      says: 'The certificate is added and waits to be proved.',
+      action: { says: 'Prove it', href: `/certificates/${done.id}` },
+    });
   };
   return (
     <div className="pt-3">
-      <FileUpload purpose="certificate" batchId={batchId} label="Certificate" hint="PDF or picture, up to 50 MB" onArrived={(file) => void add(file.id)} />
+      <FileUpload
+        purpose="certificate"
+        batchId={batchId}
+        label="Certificate"
+        hint="PDF or picture, up to 50 MB"
+        onArrived={(file) => void add(file.id)}
+      />
     </div>
   );
 }

@@ -37,7 +37,13 @@ function LineRow({ line, proving }: { line: ProvedLine; proving: Proving }) {
           <RowNumber number={proving.rows.indexOf(line.id) + 1} verdict={verdict} />
         </Cell>
         <Cell>
-          <RowButton rowId={line.id} selected={selected} says={`${line.lineNo} ${lineName(line)}`} onSelect={() => proving.select(line.id)} onConfirm={canEdit ? confirm : undefined} />
+          <RowButton
+            rowId={line.id}
+            selected={selected}
+            says={`${line.lineNo} ${lineName(line)}`}
+            onSelect={() => proving.select(line.id)}
+            onConfirm={canEdit ? confirm : undefined}
+          />
         </Cell>
         <Cell code head="Ordered" className="text-[0.78rem]">
           {line.pieces}
@@ -81,7 +87,8 @@ function LineOpen({ line, proving, canEdit }: { line: ProvedLine; proving: Provi
       <td role="cell" colSpan={6} className="border-b-heavy border-ink bg-bench">
         <div className="flex flex-col gap-2.5 py-2 pl-9 max-md:pl-0">
           <p className="text-second">
-            {line.partName}, lot {line.lotNumber}: <Pieces count={line.pieces} /> ordered, <Pieces count={line.inQuarantine} /> in quarantine
+            {line.partName}, lot {line.lotNumber}: <Pieces count={line.pieces} /> ordered,{' '}
+            <Pieces count={line.inQuarantine} /> in quarantine
             {line.away > 0 && (
               <>
                 , <Pieces count={line.away} /> still away
@@ -95,9 +102,20 @@ function LineOpen({ line, proving, canEdit }: { line: ProvedLine; proving: Provi
             . <Elsewhere line={line} />
           </p>
           {canEdit && <Entering line={line} proving={proving} />}
-          {proving.canEdit && line.coverable === 0 && <p className="text-second text-quiet">No piece in quarantine is without proof, so this certificate can cover none now.</p>}
+          {proving.canEdit && line.coverable === 0 && (
+            <p className="text-second text-quiet">
+              No piece in quarantine is without proof, so this certificate can cover none now.
+            </p>
+          )}
           {holding ? (
-            <HoldForm batchId={proving.data.batch.id} onlyLineId={line.id} certificateId={proving.data.certificate.id} kind="papers" what="In no certificate" onDone={() => setHolding(false)} />
+            <HoldForm
+              batchId={proving.data.batch.id}
+              onlyLineId={line.id}
+              certificateId={proving.data.certificate.id}
+              kind="papers"
+              what="In no certificate"
+              onDone={() => setHolding(false)}
+            />
           ) : (
             mayHold &&
             line.inQuarantine > 0 && (
@@ -119,7 +137,8 @@ function Elsewhere({ line }: { line: ProvedLine }) {
   return line.elsewhere.map((other, at) => (
     <span key={other.certificateId}>
       {at > 0 && ', '}
-      <Link href={`/certificates/${other.certificateId}`}>{other.number ?? 'another'}</Link> covers <Pieces count={other.pieces} />
+      <Link href={`/certificates/${other.certificateId}`}>{other.number ?? 'another'}</Link> covers{' '}
+      <Pieces count={other.pieces} />
     </span>
   ));
 }
@@ -127,7 +146,10 @@ function Elsewhere({ line }: { line: ProvedLine }) {
 function Entering({ line, proving }: { line: ProvedLine; proving: Proving }) {
   const [typed, setTyped] = useState(String(proving.pieces[line.id] ?? ''));
   const count = /^\d+$/.test(typed.trim()) ? Number(typed) : null;
-  const error = typed.trim() !== '' && (count === null || count > line.coverable) ? `${line.coverable} came back good and uncovered. Enter ${line.coverable} or less.` : undefined;
+  const error =
+    typed.trim() !== '' && (count === null || count > line.coverable)
+      ? `${line.coverable} came back good and uncovered. Enter ${line.coverable} or less.`
+      : undefined;
   const type = (text: string) => {
     setTyped(text);
     const entered = /^\d+$/.test(text.trim()) ? Number(text) : null;
@@ -141,7 +163,18 @@ function Entering({ line, proving }: { line: ProvedLine; proving: Proving }) {
   };
   return (
     <div className="flex flex-wrap items-start gap-2">
-      <NumberInput className="w-52" label="Pieces it covers" unit="pc" inputMode="numeric" data-key="e" data-key-says="Enter the pieces it covers" value={typed} error={error} onChange={(event) => type(event.currentTarget.value)} onKeyDown={onKeyDown} />
+      <NumberInput
+        className="w-52"
+        label="Pieces it covers"
+        unit="pc"
+        inputMode="numeric"
+        data-key="e"
+        data-key-says="Enter the pieces it covers"
+        value={typed}
+        error={error}
+        onChange={(event) => type(event.currentTarget.value)}
+        onKeyDown={onKeyDown}
+      />
       <span className="pt-[21px]">
         <Button onClick={() => type(String(line.coverable))}>All {line.coverable}</Button>
       </span>

@@ -15,9 +15,18 @@ import type { Proving } from './use-proving';
 const Reason = z.object({ reason: DecideRequirement.shape.overrideReason.unwrap().unwrap() });
 
 /** Accepting against the verdict is nothing one does in passing. */
-export function OverrideDialog({ requirement, proving }: { requirement: ProvedRequirement; proving: Proving }) {
+export function OverrideDialog({
+  requirement,
+  proving,
+}: {
+  requirement: ProvedRequirement;
+  proving: Proving;
+}) {
   const [open, setOpen] = useState(false);
-  const form = useForm({ resolver: zodResolver(Reason), defaultValues: { reason: requirement.decision?.overrideReason ?? '' } });
+  const form = useForm({
+    resolver: zodResolver(Reason),
+    defaultValues: { reason: requirement.decision?.overrideReason ?? '' },
+  });
   const { decision } = requirement;
   if (!decision) return null;
   const override = form.handleSubmit(async ({ reason }) => {
@@ -39,14 +48,24 @@ export function OverrideDialog({ requirement, proving }: { requirement: ProvedRe
         onSubmit={override}
         actions={
           <>
-            <Button look="primary" type="submit" busy={form.formState.isSubmitting} busyLabel="Keeping the reason">
+            <Button
+              look="primary"
+              type="submit"
+              busy={form.formState.isSubmitting}
+              busyLabel="Keeping the reason"
+            >
               Override and keep the reason
             </Button>
             <Button onClick={() => setOpen(false)}>Leave it not met</Button>
           </>
         }
       >
-        <TextArea label="Reason" hint="20 letters or more: the processor and the auditor read it." error={form.formState.errors.reason?.message} {...form.register('reason')} />
+        <TextArea
+          label="Reason"
+          hint="20 letters or more: the processor and the auditor read it."
+          error={form.formState.errors.reason?.message}
+          {...form.register('reason')}
+        />
       </Dialog>
     </>
   );

@@ -38,13 +38,33 @@ export function PageViewer({ file, title, facts, choice }: PageViewerProps) {
         {facts}
       </div>
       <ViewerControls paging={paging} choice={choice} />
-      <div ref={element} tabIndex={0} role="region" aria-label={`Page ${paging.page} of ${paging.pages}`} className="min-h-[320px] flex-1 overflow-auto max-lg:max-h-[60dvh]">
+      <div
+        ref={element}
+        tabIndex={0}
+        role="region"
+        aria-label={`Page ${paging.page} of ${paging.pages}`}
+        className="min-h-[320px] flex-1 overflow-auto max-lg:max-h-[60dvh]"
+      >
         <div className="flex w-max min-w-full justify-center p-[18px]">
-          {width > 0 && file.mediaType === 'application/pdf' && <PdfPage url={url} page={paging.page} width={drawn} turned={paging.turned} onPages={paging.setPages} />}
+          {width > 0 && file.mediaType === 'application/pdf' && (
+            <PdfPage
+              url={url}
+              page={paging.page}
+              width={drawn}
+              turned={paging.turned}
+              onPages={paging.setPages}
+            />
+          )}
           {file.mediaType.startsWith('image/') && (
             // A received picture is shown from where it is kept; no copy of another size would be the original.
             // eslint-disable-next-line @next/next/no-img-element -- see above
-            <img src={url} alt={`The received picture ${file.name}`} width={drawn} style={{ width: drawn, transform: `rotate(${paging.turned}deg)` }} className="h-auto max-w-none" />
+            <img
+              src={url}
+              alt={`The received picture ${file.name}`}
+              width={drawn}
+              style={{ width: drawn, transform: `rotate(${paging.turned}deg)` }}
+              className="h-auto max-w-none"
+            />
           )}
           {file.mediaType !== 'application/pdf' && !file.mediaType.startsWith('image/') && (
             <p className="p-6">
@@ -61,13 +81,23 @@ function ViewerControls({ paging, choice }: { paging: Paging; choice: ReactNode 
   return (
     <div className="flex flex-wrap items-center gap-x-4 gap-y-1 border-b border-rule bg-bench px-6 py-1 text-string max-md:px-4">
       <span className="flex items-center gap-2 whitespace-nowrap">
-        <Button look="word" shortcut="[" aria-label="Page before" onClick={() => paging.toPage(paging.page - 1)}>
+        <Button
+          look="word"
+          shortcut="["
+          aria-label="Page before"
+          onClick={() => paging.toPage(paging.page - 1)}
+        >
           Before
         </Button>
         <span className="text-quiet" aria-live="polite">
           page <span className="num">{paging.page}</span> of <span className="num">{paging.pages}</span>
         </span>
-        <Button look="word" shortcut="]" aria-label="Next page" onClick={() => paging.toPage(paging.page + 1)}>
+        <Button
+          look="word"
+          shortcut="]"
+          aria-label="Next page"
+          onClick={() => paging.toPage(paging.page + 1)}
+        >
           Next
         </Button>
       </span>

@@ -7,7 +7,16 @@ import { Failing } from '@/components/ui/failing';
 pdfjs.GlobalWorkerOptions.workerSrc = '/pdfjs/pdf.worker.min.mjs';
 
 /** Nothing of a received file is run: no evaluation, no forms, no links, only its marks on a canvas. */
-const OPTIONS = { isEvalSupported: false, useWasm: false, wasmUrl: '/pdfjs/', standardFontDataUrl: '/pdfjs/standard_fonts/', disableAutoFetch: true, disableStream: true, enableXfa: false, useSystemFonts: false };
+const OPTIONS = {
+  isEvalSupported: false,
+  useWasm: false,
+  wasmUrl: '/pdfjs/',
+  standardFontDataUrl: '/pdfjs/standard_fonts/',
+  disableAutoFetch: true,
+  disableStream: true,
+  enableXfa: false,
+  useSystemFonts: false,
+};
 
 interface PdfPageProps {
   url: string;
@@ -21,12 +30,32 @@ export function PdfPage({ url, page, width, turned, onPages }: PdfPageProps) {
   const waiting = <p className="p-6 text-quiet">Reading the file</p>;
   const failing = (
     <div className="bg-paper px-4 py-2">
-      <Failing says="The pages cannot be shown." stands="The file is kept as it was received." actions={<a href={url}>Open the file itself</a>} />
+      <Failing
+        says="The pages cannot be shown."
+        stands="The file is kept as it was received."
+        actions={<a href={url}>Open the file itself</a>}
+      />
     </div>
   );
   return (
-    <Document file={url} options={OPTIONS} loading={waiting} error={failing} noData={failing} onLoadSuccess={({ numPages }) => onPages(numPages)}>
-      <Page pageNumber={page} width={width} rotate={turned} loading={waiting} error={failing} renderAnnotationLayer={false} renderTextLayer={false} className="lw-sheet" />
+    <Document
+      file={url}
+      options={OPTIONS}
+      loading={waiting}
+      error={failing}
+      noData={failing}
+      onLoadSuccess={({ numPages }) => onPages(numPages)}
+    >
+      <Page
+        pageNumber={page}
+        width={width}
+        rotate={turned}
+        loading={waiting}
+        error={failing}
+        renderAnnotationLayer={false}
+        renderTextLayer={false}
+        className="lw-sheet"
+      />
     </Document>
   );
 }

@@ -54,10 +54,18 @@ export function ProveFoot({ proving, onSign }: { proving: Proving; onSign: () =>
 
 function SignButton({ proving, onSign, pieces }: { proving: Proving; onSign: () => void; pieces: number }) {
   const notNow = whyNotNow(proving);
-  if (!proving.mayProve) return <p className="text-second text-quiet">Inspectors prove and sign. You see what they see.</p>;
+  if (!proving.mayProve)
+    return <p className="text-second text-quiet">Inspectors prove and sign. You see what they see.</p>;
   return (
     <div className="w-[16.75rem] flex-none text-right max-md:w-full">
-      <Button look="primary" size="big" notNow={notNow ?? undefined} reasonAt="below" onClick={onSign} className="min-w-44 max-md:w-full">
+      <Button
+        look="primary"
+        size="big"
+        notNow={notNow ?? undefined}
+        reasonAt="below"
+        onClick={onSign}
+        className="min-w-44 max-md:w-full"
+      >
         {pieces > 0 ? `Sign for ${pieces} pieces` : 'Sign'}
       </Button>
     </div>
@@ -67,8 +75,13 @@ function SignButton({ proving, onSign, pieces }: { proving: Proving; onSign: () 
 function whyNotNow({ data, readiness }: Proving): string | null {
   if (data.certificate.setAsideAt !== null) return 'It is set aside.';
   if (!data.file.verified) return 'The file did not arrive whole.';
-  if (data.dispatchedByYou === 'refuse') return `You dispatched ${data.batch.number}. Here another person accepts its certificates.`;
-  if (data.lines.every((line) => line.coverable === 0)) return data.lines.some((line) => line.covered > 0) ? 'All that came back is covered.' : 'Nothing is in quarantine yet. Count in first.';
-  if (data.certificate.number === null || data.certificate.datedOn === null) return 'Enter its number and date first.';
+  if (data.dispatchedByYou === 'refuse')
+    return `You dispatched ${data.batch.number}. Here another person accepts its certificates.`;
+  if (data.lines.every((line) => line.coverable === 0))
+    return data.lines.some((line) => line.covered > 0)
+      ? 'All that came back is covered.'
+      : 'Nothing is in quarantine yet. Count in first.';
+  if (data.certificate.number === null || data.certificate.datedOn === null)
+    return 'Enter its number and date first.';
   return readiness.why;
 }

@@ -35,7 +35,8 @@ export function ProvePanel({ proving }: { proving: Proving }) {
           <BatchTag stage={batch.stage} number={batch.number} href={`/batches/${batch.id}`} />
           <span className="font-medium">{batch.processor}</span>
           <span className="text-quiet">
-            <span className="num">{batch.pieces}</span> pc, {PROCESS_WORDS[batch.process]}, {[batch.specification, batch.specificationRevision, batch.classType].filter(Boolean).join(' ')}
+            <span className="num">{batch.pieces}</span> pc, {PROCESS_WORDS[batch.process]},{' '}
+            {[batch.specification, batch.specificationRevision, batch.classType].filter(Boolean).join(' ')}
           </span>
         </div>
         <CertificateWarnings proving={proving} />
@@ -45,7 +46,11 @@ export function ProvePanel({ proving }: { proving: Proving }) {
         </Table>
         <Signatures proving={proving} />
       </div>
-      {signing ? <SignStep proving={proving} onBack={() => setSigning(false)} onSigned={() => setSigning(false)} /> : <ProveFoot proving={proving} onSign={() => setSigning(true)} />}
+      {signing ? (
+        <SignStep proving={proving} onBack={() => setSigning(false)} onSigned={() => setSigning(false)} />
+      ) : (
+        <ProveFoot proving={proving} onSign={() => setSigning(true)} />
+      )}
     </div>
   );
 }
@@ -64,7 +69,10 @@ function Rows({ proving }: { proving: Proving }) {
       )}
       {withOwn.map((line) => (
         <Group key={line.id} says={`Line ${line.lineNo}, ${line.partNumber} rev ${line.partRevision}`}>
-          <RequirementRows requirements={requirements.filter((one) => one.lineId === line.id)} proving={proving} />
+          <RequirementRows
+            requirements={requirements.filter((one) => one.lineId === line.id)}
+            proving={proving}
+          />
         </Group>
       ))}
       <GroupRow says="Lines and pieces" span={COLUMNS.length} />

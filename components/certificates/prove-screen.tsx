@@ -28,7 +28,9 @@ function Viewed({ proving: { data } }: { proving: Proving }) {
   const [chartId, setChartId] = useState<string | null>(null);
   const chart = data.charts.find((one) => one.id === chartId);
   const { certificate, file } = data;
-  const title = chart ? `Chart ${chart.fileName}` : `Certificate ${certificateName({ ...certificate, fileName: file.name })}`;
+  const title = chart
+    ? `Chart ${chart.fileName}`
+    : `Certificate ${certificateName({ ...certificate, fileName: file.name })}`;
   const shown = chart ? { id: chart.fileId, name: chart.fileName, mediaType: chart.mediaType } : file;
   const facts = (
     <>

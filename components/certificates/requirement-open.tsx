@@ -46,7 +46,9 @@ export function RequirementOpen({ requirement, proving, canEdit }: RequirementOp
           {canEdit && <Judge requirement={requirement} proving={proving} />}
           {doing === null && (
             <div className="flex flex-wrap gap-2">
-              {canEdit && decision && decision.verdict !== 'meets' && <OverrideDialog requirement={requirement} proving={proving} />}
+              {canEdit && decision && decision.verdict !== 'meets' && (
+                <OverrideDialog requirement={requirement} proving={proving} />
+              )}
               {mayHold && (
                 <Button size="small" look="stop" shortcut="H" onClick={() => setDoing('hold')}>
                   Hold pieces
@@ -59,7 +61,15 @@ export function RequirementOpen({ requirement, proving, canEdit }: RequirementOp
               )}
             </div>
           )}
-          {doing === 'ask' && <AskForm batchId={batch.id} processor={processor} lineId={requirement.lineId} body={questionOf(requirement, certificate.number)} onDone={done} />}
+          {doing === 'ask' && (
+            <AskForm
+              batchId={batch.id}
+              processor={processor}
+              lineId={requirement.lineId}
+              body={questionOf(requirement, certificate.number)}
+              onDone={done}
+            />
+          )}
           {doing === 'hold' && (
             <HoldForm
               batchId={batch.id}
@@ -81,7 +91,10 @@ function SourceWords({ requirement }: { requirement: ProvedRequirement }) {
   const { characteristic, source, sourceText } = requirement;
   return (
     <>
-      {characteristic}: {limitWords(requirement) || 'must be stated'}. <span className="text-source text-faint">{sourceText ? `${sourceText}.` : `From the ${SOURCES[source]}.`}</span>
+      {characteristic}: {limitWords(requirement) || 'must be stated'}.{' '}
+      <span className="text-source text-faint">
+        {sourceText ? `${sourceText}.` : `From the ${SOURCES[source]}.`}
+      </span>
     </>
   );
 }
@@ -91,7 +104,10 @@ function Judge({ requirement, proving }: Omit<RequirementOpenProps, 'canEdit'>) 
   const [stated, setStated] = useState(decision?.stated ?? '');
   const judge = async (verdict: Verdict) => {
     if (verdict === 'meets') proving.onward(requirement.id);
-    await proving.decide(requirement, { verdict, stated: stated.trim() || (verdict === 'meets' ? 'as ordered' : '') });
+    await proving.decide(requirement, {
+      verdict,
+      stated: stated.trim() || (verdict === 'meets' ? 'as ordered' : ''),
+    });
   };
   const onKeyDown = (event: KeyboardEvent) => {
     if (event.key === 'Enter') {
@@ -132,8 +148,14 @@ function whatIsWrong(requirement: ProvedRequirement): string {
   const { characteristic, decision } = requirement;
   const ordered = limitWords(requirement);
   if (!decision) return `${characteristic}: ordered ${ordered}`;
-  const says = { meets: `states ${decision.stated}`, does_not_meet: `states ${decision.stated}`, not_stated: 'does not state it', cannot_tell: 'cannot be read there' }[decision.verdict];
+  const says = {
+    meets: `states ${decision.stated}`,
+    does_not_meet: `states ${decision.stated}`,
+    not_stated: 'does not state it',
+    cannot_tell: 'cannot be read there',
+  }[decision.verdict];
   return `${characteristic}: ordered ${ordered || 'to be stated'}, the certificate ${says}`;
 }
 
-const questionOf = (requirement: ProvedRequirement, number: string | null): string => `${number === null ? '' : `Certificate ${number}. `}${whatIsWrong(requirement)}. Send a corrected certificate.`;
+const questionOf = (requirement: ProvedRequirement, number: string | null): string =>
+  `${number === null ? '' : `Certificate ${number}. `}${whatIsWrong(requirement)}. Send a corrected certificate.`;

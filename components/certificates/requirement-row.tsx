@@ -13,8 +13,16 @@ import type { Proving } from './use-proving';
 /** What Enter writes where the page says just what was ordered. */
 const AS_ORDERED = 'as ordered';
 
-export function RequirementRows({ requirements, proving }: { requirements: readonly ProvedRequirement[]; proving: Proving }) {
-  return requirements.map((requirement) => <RequirementRow key={requirement.id} requirement={requirement} proving={proving} />);
+export function RequirementRows({
+  requirements,
+  proving,
+}: {
+  requirements: readonly ProvedRequirement[];
+  proving: Proving;
+}) {
+  return requirements.map((requirement) => (
+    <RequirementRow key={requirement.id} requirement={requirement} proving={proving} />
+  ));
 }
 
 function RequirementRow({ requirement, proving }: { requirement: ProvedRequirement; proving: Proving }) {
@@ -33,7 +41,13 @@ function RequirementRow({ requirement, proving }: { requirement: ProvedRequireme
           <RowNumber number={proving.rows.indexOf(id) + 1} verdict={decision?.verdict ?? 'to_decide'} />
         </Cell>
         <Cell>
-          <RowButton rowId={id} selected={selected} says={characteristic} onSelect={() => proving.select(id)} onConfirm={canEdit ? confirm : undefined} />
+          <RowButton
+            rowId={id}
+            selected={selected}
+            says={characteristic}
+            onSelect={() => proving.select(id)}
+            onConfirm={canEdit ? confirm : undefined}
+          />
         </Cell>
         <Cell code head="Ordered" className="text-[0.78rem]">
           {limitWords(requirement)}
@@ -42,7 +56,12 @@ function RequirementRow({ requirement, proving }: { requirement: ProvedRequireme
           {decision?.stated}
         </Cell>
         <Cell>
-          <VerdictWord verdict={decision?.verdict ?? 'to_decide'} {...(decision?.overrideReason ? { overruled: { to: 'meets' as const, reason: decision.overrideReason } } : {})} />
+          <VerdictWord
+            verdict={decision?.verdict ?? 'to_decide'}
+            {...(decision?.overrideReason
+              ? { overruled: { to: 'meets' as const, reason: decision.overrideReason } }
+              : {})}
+          />
         </Cell>
         <Cell right>
           <YourPart requirement={requirement} />

@@ -10,5 +10,11 @@ const GROUNDS: Record<Verdict, string> = {
 
 /** The number of a row in the colour of its verdict, as it stands beside a spot on the page. */
 export function RowNumber({ number, verdict }: { number: number; verdict: Verdict }) {
-  return <span className={`inline-block min-w-[18px] px-[3px] text-center font-mono text-[0.78rem] leading-4 font-semibold text-paper ${GROUNDS[verdict]}`}>{number}</span>;
+  return (
+    <span
+      className={`inline-block min-w-[18px] px-[3px] text-center font-mono text-[0.78rem] leading-4 font-semibold text-paper ${GROUNDS[verdict]}`}
+    >
+      {number}
+    </span>
+  );
 }

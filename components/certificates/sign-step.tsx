@@ -32,13 +32,25 @@ export function SignStep({ proving, onBack, onSigned }: SignStepProps) {
     if (write.isPending) return;
     const form = event.currentTarget;
     const password = new FormData(form).get('password');
-    if (typeof password !== 'string' || password === '') return setRefusal({ password: 'Enter your password.' });
-    const decisions = data.requirements.flatMap(({ id, decision }) => (decision ? [{ requirementId: id, version: decision.version }] : []));
+    if (typeof password !== 'string' || password === '')
+      return setRefusal({ password: 'Enter your password.' });
+    const decisions = data.requirements.flatMap(({ id, decision }) =>
+      decision ? [{ requirementId: id, version: decision.version }] : [],
+    );
     try {
-      await write.mutateAsync({ certificateId: data.certificate.id, version: data.certificate.version, coverage, decisions, password });
+      await write.mutateAsync({
+        certificateId: data.certificate.id,
+        version: data.certificate.version,
+        coverage,
+        decisions,
+        password,
+      });
       proving.forgetPieces();
       onSigned();
-      showMessage({ says: `Signed for ${pieces}. ${certificateName(data.certificate)} covers them.`, action: { says: `Open ${data.batch.number}`, href: `/batches/${data.batch.id}` } });
+      showMessage({
+        says: `Signed for ${pieces}. ${certificateName(data.certificate)} covers them.`,
+        action: { says: `Open ${data.batch.number}`, href: `/batches/${data.batch.id}` },
+      });
     } catch (error) {
       form.reset();
       setRefusal(refusalOf(error as ApiError));
@@ -46,13 +58,32 @@ export function SignStep({ proving, onBack, onSigned }: SignStepProps) {
   };
 
   return (
-    <form noValidate onSubmit={sign} aria-label="Sign" className="sticky bottom-0 z-10 border-t-heavy border-ink bg-bench px-6 py-3 max-md:static max-md:px-4">
+    <form
+      noValidate
+      onSubmit={sign}
+      aria-label="Sign"
+      className="sticky bottom-0 z-10 border-t-heavy border-ink bg-bench px-6 py-3 max-md:static max-md:px-4"
+    >
       <div className="grid grid-cols-1 gap-x-6 gap-y-3 md:grid-cols-[minmax(0,1fr)_268px]">
         <WhatIsSigned proving={proving} />
         <div className="flex flex-col gap-3">
-          <TextField label={`Password of ${me?.name ?? 'yours'}`} name="password" type="password" autoComplete="current-password" autoFocus error={refusal.password} />
+          <TextField
+            label={`Password of ${me?.name ?? 'yours'}`}
+            name="password"
+            type="password"
+            autoComplete="current-password"
+            autoFocus
+            error={refusal.password}
+          />
           <div className="flex flex-wrap gap-2">
-            <Button look="primary" size="big" type="submit" className="flex-1" busy={write.isPending} busyLabel={`Signing for ${pieces}`}>
+            <Button
+              look="primary"
+              size="big"
+              type="submit"
+              className="flex-1"
+              busy={write.isPending}
+              busyLabel={`Signing for ${pieces}`}
+            >
               Sign for {pieces}
             </Button>
             <Button size="big" onClick={onBack}>
@@ -67,7 +98,9 @@ export function SignStep({ proving, onBack, onSigned }: SignStepProps) {
         </div>
       </div>
       <p className="pt-2 text-source text-quiet">
-        “{data.sentence}” {data.file.sha256 && `The page, the values and your name are kept together with hash ${hashStart(data.file.sha256)}.`}
+        “{data.sentence}”{' '}
+        {data.file.sha256 &&
+          `The page, the values and your name are kept together with hash ${hashStart(data.file.sha256)}.`}
       </p>
     </form>
   );
@@ -76,24 +109,50 @@ export function SignStep({ proving, onBack, onSigned }: SignStepProps) {
 function WhatIsSigned({ proving: { data, coverage, readiness } }: { proving: Proving }) {
   const held = data.held.reduce((sum, one) => sum + one.pieces, 0);
   const name = certificateName(data.certificate);
-  const overrides = data.requirements.filter((one) => readiness.bearing.includes(one.id) && one.decision?.overrideReason).length;
+  const overrides = data.requirements.filter(
+    (one) => readiness.bearing.includes(one.id) && one.decision?.overrideReason,
+  ).length;
   return (
     <div>
       <h2>
-        You sign for <span className="num">{readiness.pieces}</span> pieces{held > 0 && ` and ${held} on hold stay out`}
+        You sign for <span className="num">{readiness.pieces}</span> pieces
+        {held > 0 && ` and ${held} on hold stay out`}
       </h2>
       <table className="mt-1 w-full text-string" aria-label="What is covered and what is held">
         <tbody>
           {coverage.map(({ lineId, pieces }) => {
             const line = data.lines.find((one) => one.id === lineId);
-            return line && <SignedLine key={lineId} lineNo={line.lineNo} part={`${line.partNumber} ${line.partRevision}`} pieces={pieces} says={`covered by ${name}`} verdict="meets" />;
+            return (
+              line && (
+                <SignedLine
+                  key={lineId}
+                  lineNo={line.lineNo}
+                  part={`${line.partNumber} ${line.partRevision}`}
+                  pieces={pieces}
+                  says={`covered by ${name}`}
+                  verdict="meets"
+                />
+              )
+            );
           })}
           {data.held.map((one) => (
-            <SignedLine key={one.id} lineNo={one.lineNo} part={data.lines.find((line) => line.lineNo === one.lineNo)?.partNumber ?? ''} pieces={one.pieces} says={`held, ${one.number}: ${one.what}`} verdict="does_not_meet" />
+            <SignedLine
+              key={one.id}
+              lineNo={one.lineNo}
+              part={data.lines.find((line) => line.lineNo === one.lineNo)?.partNumber ?? ''}
+              pieces={one.pieces}
+              says={`held, ${one.number}: ${one.what}`}
+              verdict="does_not_meet"
+            />
           ))}
         </tbody>
       </table>
-      {overrides > 0 && <p className="pt-1.5 text-second text-quiet">{overrides === 1 ? 'One requirement is' : `${overrides} requirements are`} accepted against the verdict; the reasons are sealed too.</p>}
+      {overrides > 0 && (
+        <p className="pt-1.5 text-second text-quiet">
+          {overrides === 1 ? 'One requirement is' : `${overrides} requirements are`} accepted against the
+          verdict; the reasons are sealed too.
+        </p>
+      )}
     </div>
   );
 }
@@ -113,7 +172,9 @@ function SignedLine({ lineNo, part, pieces, says, verdict }: SignedLineProps) {
       <td className="num py-[3px] pr-2 font-semibold">{part}</td>
       <td className="num py-[3px] pr-2.5 text-right font-semibold">{pieces}</td>
       <td className="py-[3px]">
-        <span className={`inline-flex items-center gap-2 ${verdict === 'meets' ? 'text-proved-ink' : 'text-held-ink'}`}>
+        <span
+          className={`inline-flex items-center gap-2 ${verdict === 'meets' ? 'text-proved-ink' : 'text-held-ink'}`}
+        >
           <VerdictMark verdict={verdict} size={13} />
           <span className="text-ink">{says}</span>
         </span>

@@ -26,9 +26,12 @@ export function Signatures({ proving: { data } }: { proving: Proving }) {
             , <Moment at={new Date(signature.signedAt)} clock={clock} />
           </p>
           <p className="text-second text-quiet">“{signature.sentence}”</p>
-          <p className={`flex items-center gap-1.5 text-second ${signature.intact ? 'text-proved-ink' : 'text-held-ink'}`}>
+          <p
+            className={`flex items-center gap-1.5 text-second ${signature.intact ? 'text-proved-ink' : 'text-held-ink'}`}
+          >
             <VerdictMark verdict={signature.intact ? 'meets' : 'does_not_meet'} size={13} />
-            {signature.intact ? 'The seal holds:' : 'What is kept is not what was sealed:'} <span className="num [overflow-wrap:anywhere]">{hashStart(signature.seal)}</span>
+            {signature.intact ? 'The seal holds:' : 'What is kept is not what was sealed:'}{' '}
+            <span className="num [overflow-wrap:anywhere]">{hashStart(signature.seal)}</span>
           </p>
         </div>
       ))}

@@ -4,7 +4,12 @@ import { useState } from 'react';
 import { useRead, useWrite } from '@/components/api/use-api';
 import { useMay } from '@/components/session/use-me';
 import { showMessage } from '@/components/ui/message';
-import { decideRequirement, getCertificate, listCertificates, type ProvedRequirement } from '@/lib/certificates/contract';
+import {
+  decideRequirement,
+  getCertificate,
+  listCertificates,
+  type ProvedRequirement,
+} from '@/lib/certificates/contract';
 import { readinessOf } from '@/lib/certificates/ready-to-sign';
 import type { Verdict } from '@/lib/certificates/verdict';
 
@@ -26,8 +31,14 @@ export function useProving(certificateId: string) {
   const write = useWrite(decideRequirement, { refreshes: [getCertificate, listCertificates] });
 
   const coverage = data.lines.map((line) => ({ lineId: line.id, pieces: pieces[line.id] ?? 0 }));
-  const readiness = readinessOf(data.requirements.map((one) => ({ ...one, requirementId: one.id })), coverage);
-  const isDecided = (rowId: string) => data.requirements.some((one) => one.id === rowId && one.decision !== null) || pieces[rowId] != null || data.lines.some((line) => line.id === rowId && line.coverable === 0);
+  const readiness = readinessOf(
+    data.requirements.map((one) => ({ ...one, requirementId: one.id })),
+    coverage,
+  );
+  const isDecided = (rowId: string) =>
+    data.requirements.some((one) => one.id === rowId && one.decision !== null) ||
+    pieces[rowId] != null ||
+    data.lines.some((line) => line.id === rowId && line.coverable === 0);
   const rows = rowsOf(data);
 
   const toRow = (rowId: string | undefined) => {
@@ -41,10 +52,25 @@ export function useProving(certificateId: string) {
     toRow(after.find((rowId) => !isDecided(rowId)) ?? after[0]);
   };
 
-  const decide = async (requirement: ProvedRequirement, { stated, verdict, overrideReason = null, note }: Reading) => {
+  const decide = async (
+    requirement: ProvedRequirement,
+    { stated, verdict, overrideReason = null, note }: Reading,
+  ) => {
     const { decision } = requirement;
-    const input = { certificateId, requirementId: requirement.id, version: decision?.version ?? null, stated: stated ?? decision?.stated ?? '', verdict, overrideReason, note: note ?? decision?.note ?? '' };
-    await write.mutateAsync(input).catch((error: unknown) => showMessage({ says: error instanceof Error ? error.message : 'Not saved.', failed: true }));
+    const input = {
+      certificateId,
+      requirementId: requirement.id,
+      version: decision?.version ?? null,
+      stated: stated ?? decision?.stated ?? '',
+      verdict,
+      overrideReason,
+      note: note ?? decision?.note ?? '',
+    };
+    await write
+      .mutateAsync(input)
+      .catch((error: unknown) =>
+        showMessage({ says: error instanceof Error ? error.message : 'Not saved.', failed: true }),
+      );
   };
 
   return {
@@ -69,5 +95,7 @@ export type Proving = ReturnType<typeof useProving>;
 
 /** The row that opens is drawn with the next frame; the focus waits for it. */
 function focusRow(rowId: string) {
-  requestAnimationFrame(() => document.getElementById(`row-${rowId}`)?.focus({ focusVisible: true } as FocusOptions));
+  requestAnimationFrame(() =>
+    document.getElementById(`row-${rowId}`)?.focus({ focusVisible: true } as FocusOptions),
+  );
 }

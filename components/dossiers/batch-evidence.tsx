@@ -26,14 +26,23 @@ export function BatchEvidence({ batch, zone }: BatchEvidenceProps) {
     { caption: 'Approval that day', value: batch.approval ?? 'none on record' },
   ].filter((cell) => cell.value !== '');
   return (
-    <Section title={`${batch.number}, ${processWords(batch.process)}`} note={`${batch.pieces} ${batch.pieces === 1 ? 'piece' : 'pieces'}, line ${batch.lineNo}`}>
+    <Section
+      title={`${batch.number}, ${processWords(batch.process)}`}
+      note={`${batch.pieces} ${batch.pieces === 1 ? 'piece' : 'pieces'}, line ${batch.lineNo}`}
+    >
       <div className="py-2">
         <TitleCells cells={cells} />
       </div>
       {batch.overrides.length > 0 && (
         <CheckList label="Blockers that were overridden">
           {batch.overrides.map((one) => (
-            <CheckRow key={one.check} level="warn" sentence={`Overridden: ${reasonWords(one.check)}.`} rest={one.reason} source={one.by} />
+            <CheckRow
+              key={one.check}
+              level="warn"
+              sentence={`Overridden: ${reasonWords(one.check)}.`}
+              rest={one.reason}
+              source={one.by}
+            />
           ))}
         </CheckList>
       )}
@@ -82,9 +91,21 @@ function Fact({ name, children }: { name: string; children: ReactNode }) {
 }
 
 function Requirements({ batch }: { batch: DossierBatch }) {
-  if (batch.requirements.length === 0) return <p className="py-2 text-quiet">Nothing was asked to be proved of this line.</p>;
+  if (batch.requirements.length === 0)
+    return <p className="py-2 text-quiet">Nothing was asked to be proved of this line.</p>;
   return (
-    <Table label={`What had to be proved on ${batch.number}`} columns={[{ says: 'To be proved' }, { says: 'Limit' }, { says: 'Stated' }, { says: 'Verdict' }, { says: 'Certificate' }, { says: 'Decided by' }]} dense>
+    <Table
+      label={`What had to be proved on ${batch.number}`}
+      columns={[
+        { says: 'To be proved' },
+        { says: 'Limit' },
+        { says: 'Stated' },
+        { says: 'Verdict' },
+        { says: 'Certificate' },
+        { says: 'Decided by' },
+      ]}
+      dense
+    >
       {batch.requirements.flatMap((one, at) =>
         one.decisions.length === 0
           ? [
@@ -103,7 +124,9 @@ function Requirements({ batch }: { batch: DossierBatch }) {
             ]
           : one.decisions.map((decision, row) => (
               <Row key={`${at} ${row}`}>
-                <Cell strong>{row === 0 ? one.characteristic : <span className="sr-only">{one.characteristic}</span>}</Cell>
+                <Cell strong>
+                  {row === 0 ? one.characteristic : <span className="sr-only">{one.characteristic}</span>}
+                </Cell>
                 <Cell code head="Limit">
                   {row === 0 && (one.limit || 'as ordered')}
                 </Cell>
@@ -111,7 +134,12 @@ function Requirements({ batch }: { batch: DossierBatch }) {
                   {decision.stated}
                 </Cell>
                 <Cell>
-                  <VerdictWord verdict={asVerdict(decision.verdict)} {...(decision.overrideReason ? { overruled: { to: 'meets', reason: decision.overrideReason } } : {})} />
+                  <VerdictWord
+                    verdict={asVerdict(decision.verdict)}
+                    {...(decision.overrideReason
+                      ? { overruled: { to: 'meets', reason: decision.overrideReason } }
+                      : {})}
+                  />
                 </Cell>
                 <Cell code head="Certificate">
                   {decision.certificate}
@@ -130,7 +158,8 @@ function Nonconformance({ one, zone }: { one: DossierBatch['nonconformances'][nu
   return (
     <div className="border-b border-rule py-2">
       <p>
-        <strong className="num text-held-ink">{one.number}</strong> <strong>{one.pieces === 1 ? '1 piece' : `${one.pieces} pieces`}</strong>: {one.what}
+        <strong className="num text-held-ink">{one.number}</strong>{' '}
+        <strong>{one.pieces === 1 ? '1 piece' : `${one.pieces} pieces`}</strong>: {one.what}
       </p>
       {one.dispositions.length === 0 && <p className="text-held-ink">Not decided yet.</p>}
       {one.dispositions.map((d, at) => (
@@ -147,13 +176,19 @@ function Nonconformance({ one, zone }: { one: DossierBatch['nonconformances'][nu
 }
 
 function Signatures({ batch, zone }: BatchEvidenceProps) {
-  if (batch.signatures.length === 0) return <p className="py-2 font-cond text-word text-dispatched-ink">No certificate is signed for this line yet.</p>;
+  if (batch.signatures.length === 0)
+    return (
+      <p className="py-2 font-cond text-word text-dispatched-ink">
+        No certificate is signed for this line yet.
+      </p>
+    );
   return (
     <ul aria-label={`Signatures on ${batch.number}`}>
       {batch.signatures.map((one) => (
         <li key={`${one.seal} ${one.certificate}`} className="border-b border-rule py-2">
           <p>
-            <VerdictWord verdict="meets" says={`signed for ${one.pieces}`} /> of certificate <strong className="num">{one.certificate}</strong>: {one.signer}, <When at={one.at} zone={zone} />
+            <VerdictWord verdict="meets" says={`signed for ${one.pieces}`} /> of certificate{' '}
+            <strong className="num">{one.certificate}</strong>: {one.signer}, <When at={one.at} zone={zone} />
           </p>
           <p className="text-second text-quiet">“{one.sentence}”</p>
           <p className="num text-source break-all text-quiet">

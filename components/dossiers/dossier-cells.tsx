@@ -20,7 +20,10 @@ export function DossierCells({ evidence: { part, lot, shop } }: { evidence: Doss
         { caption: 'Material', value: [part.material, part.thickness].filter(Boolean).join(', ') },
         { caption: 'Heat', value: <span className="num">{lot.heat}</span> },
         { caption: 'Condition', value: `${part.madeCondition} to ${part.endCondition}` },
-        { caption: 'Made', value: `${lot.made} on ${dayWords(new Date(lot.madeOn), { zone: shop.zone, now: ALWAYS_WITH_YEAR })}` },
+        {
+          caption: 'Made',
+          value: `${lot.made} on ${dayWords(new Date(lot.madeOn), { zone: shop.zone, now: ALWAYS_WITH_YEAR })}`,
+        },
       ]}
     />
   );

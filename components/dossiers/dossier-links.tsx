@@ -35,7 +35,11 @@ export function DossierLinks({ lotId, links }: { lotId: string; links: readonly 
     <Section title="Links for people outside" note="read only, no password">
       {made && <NewAddress {...made} />}
       {mayShare && <ShareForm lotId={lotId} onMade={setMade} />}
-      {links.length === 0 && <p className="py-2 text-quiet">No link is given out.{!mayShare && ' Inspectors and admins give them out.'}</p>}
+      {links.length === 0 && (
+        <p className="py-2 text-quiet">
+          No link is given out.{!mayShare && ' Inspectors and admins give them out.'}
+        </p>
+      )}
       {links.length > 0 && (
         <ul aria-label="Links given out">
           {links.map((link) => (
@@ -47,12 +51,23 @@ export function DossierLinks({ lotId, links }: { lotId: string; links: readonly 
   );
 }
 
-function ShareForm({ lotId, onMade }: { lotId: string; onMade: (made: { url: string; forWhom: string }) => void }) {
+function ShareForm({
+  lotId,
+  onMade,
+}: {
+  lotId: string;
+  onMade: (made: { url: string; forWhom: string }) => void;
+}) {
   const write = useWrite(shareDossier, { refreshes: [getDossier] });
-  const form = useForm<z.input<typeof Share>, unknown, z.output<typeof Share>>({ resolver: zodResolver(Share), defaultValues: { forWhom: '', days: '30' } });
+  const form = useForm<z.input<typeof Share>, unknown, z.output<typeof Share>>({
+    resolver: zodResolver(Share),
+    defaultValues: { forWhom: '', days: '30' },
+  });
   const { errors } = form.formState;
   const share = form.handleSubmit(async (typed) => {
-    const done = await write.mutateAsync({ lotId, ...typed }, { onError: showOnForm(form) }).catch(() => null);
+    const done = await write
+      .mutateAsync({ lotId, ...typed }, { onError: showOnForm(form) })
+      .catch(() => null);
     if (!done) return;
     onMade({ url: done.url, forWhom: typed.forWhom });
     form.reset();
@@ -60,8 +75,22 @@ function ShareForm({ lotId, onMade }: { lotId: string; onMade: (made: { url: str
   return (
     <form noValidate onSubmit={share} aria-label="Make a link" className="pb-3">
       <div className="flex flex-wrap items-start gap-x-3 gap-y-2">
-        <TextField label="For whom" hint="Stands on the page they see" className="min-w-48 flex-1" autoComplete="off" error={errors.forWhom?.message} {...form.register('forWhom')} />
-        <NumberInput label="For how long" unit="days" inputMode="numeric" className="w-32" error={errors.days?.message} {...form.register('days')} />
+        <TextField
+          label="For whom"
+          hint="Stands on the page they see"
+          className="min-w-48 flex-1"
+          autoComplete="off"
+          error={errors.forWhom?.message}
+          {...form.register('forWhom')}
+        />
+        <NumberInput
+          label="For how long"
+          unit="days"
+          inputMode="numeric"
+          className="w-32"
+          error={errors.days?.message}
+          {...form.register('days')}
+        />
       </div>
       <div className="pt-2">
         <Button type="submit" busy={write.isPending} busyLabel="Making the link">
@@ -82,7 +111,9 @@ function LinkLine({ link, mayWithdraw }: { link: Link; mayWithdraw: boolean }) {
   const hasEnded = new Date(link.expiresAt) <= clock.now;
   const isOpen = link.withdrawnAt === null && !hasEnded;
   return (
-    <li className={`flex flex-wrap items-baseline gap-x-4 border-b border-rule py-2 ${isOpen ? '' : 'text-faint'}`}>
+    <li
+      className={`flex flex-wrap items-baseline gap-x-4 border-b border-rule py-2 ${isOpen ? '' : 'text-faint'}`}
+    >
       <span className="min-w-0 flex-1">
         <strong className={isOpen ? '' : 'font-normal'}>{link.forWhom}</strong>{' '}
         <span className="block text-second text-quiet">
@@ -93,7 +124,8 @@ function LinkLine({ link, mayWithdraw }: { link: Link; mayWithdraw: boolean }) {
           )}
           {link.withdrawnAt === null && (
             <>
-              {hasEnded ? 'ended' : 'until'} <Day day={calendarDay(new Date(link.expiresAt), clock.zone)} clock={clock} />
+              {hasEnded ? 'ended' : 'until'}{' '}
+              <Day day={calendarDay(new Date(link.expiresAt), clock.zone)} clock={clock} />
             </>
           )}
           , given out by {link.createdBy}
@@ -113,7 +145,8 @@ function WithdrawLink({ link }: { link: Link }) {
         setOpen(false);
         showMessage({ says: `The link for ${link.forWhom} is withdrawn.` });
       },
-      (error: unknown) => showMessage({ says: error instanceof Error ? error.message : 'It was not withdrawn.', failed: true }),
+      (error: unknown) =>
+        showMessage({ says: error instanceof Error ? error.message : 'It was not withdrawn.', failed: true }),
     );
   return (
     <>

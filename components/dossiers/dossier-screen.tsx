@@ -35,9 +35,16 @@ export function DossierScreen({ lotId }: { lotId: string }) {
         main={<Evidence evidence={evidence} filesAt="/api/files/" filesEnd="/content" />}
         side={
           <div className="no-print flex flex-col gap-6">
-            <MadeDossiers lotId={lotId} originals={evidence.files.length} movedAt={evidence.movements.at(-1)?.at ?? null} />
+            <MadeDossiers
+              lotId={lotId}
+              originals={evidence.files.length}
+              movedAt={evidence.movements.at(-1)?.at ?? null}
+            />
             <DossierLinks lotId={lotId} links={links} />
-            <Caution>The dossier records; it releases nothing by itself. The drawing, the order and the governing specification at its invoked revision come first.</Caution>
+            <Caution>
+              The dossier records; it releases nothing by itself. The drawing, the order and the governing
+              specification at its invoked revision come first.
+            </Caution>
           </div>
         }
       />

@@ -21,12 +21,21 @@ export function movementSpot(text: string): string {
 export const reasonWords = (reason: string): string => reason.replaceAll('_', ' ');
 
 export function receiptWords(one: DossierBatch['receipts'][number]): string {
-  const parts = [`${one.good} good`, one.damaged > 0 && `${one.damaged} damaged`, one.short > 0 && `${one.short} short`, one.over > 0 && `${one.over} over`];
+  const parts = [
+    `${one.good} good`,
+    one.damaged > 0 && `${one.damaged} damaged`,
+    one.short > 0 && `${one.short} short`,
+    one.over > 0 && `${one.over} over`,
+  ];
   return parts.filter(Boolean).join(', ');
 }
 
 /** `O to T42` */
-export const conditionsWords = ({ conditionBefore, targetCondition }: Pick<DossierBatch, 'conditionBefore' | 'targetCondition'>): string => [conditionBefore, targetCondition].filter(Boolean).join(' to ');
+export const conditionsWords = ({
+  conditionBefore,
+  targetCondition,
+}: Pick<DossierBatch, 'conditionBefore' | 'targetCondition'>): string =>
+  [conditionBefore, targetCondition].filter(Boolean).join(' to ');
 
 /** Papers are read years later, so a moment on them always names its year: seen from here no day is of this year. */
 export const ALWAYS_WITH_YEAR = new Date(0);

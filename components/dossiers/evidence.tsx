@@ -21,7 +21,12 @@ export function Evidence({ evidence, filesAt, filesEnd }: EvidenceProps) {
   return (
     <div className="flex min-w-0 flex-col gap-6">
       <Section title="Where every piece is" note={`${lot.made.toLocaleString('en-US')} made`}>
-        <Table label="Where every piece is" columns={[{ says: 'Place' }, { says: 'Pieces', right: true }]} keep dense>
+        <Table
+          label="Where every piece is"
+          columns={[{ says: 'Place' }, { says: 'Pieces', right: true }]}
+          keep
+          dense
+        >
           {whereabouts.map((one) => (
             <Row key={`${one.place} ${one.holder}`}>
               <Cell>{spotText(one.place, one.holder)}</Cell>
@@ -42,14 +47,30 @@ export function Evidence({ evidence, filesAt, filesEnd }: EvidenceProps) {
       </Section>
       {evidence.batches.length === 0 && (
         <Section title="Outside steps">
-          <p className="py-3 text-quiet">It has not gone out yet: there is nothing that a processor had to prove.</p>
+          <p className="py-3 text-quiet">
+            It has not gone out yet: there is nothing that a processor had to prove.
+          </p>
         </Section>
       )}
       {evidence.batches.map((batch) => (
         <BatchEvidence key={`${batch.id} ${batch.lineNo}`} batch={batch} zone={shop.zone} />
       ))}
-      <Section title="Every movement" note={`${evidence.movements.length} ${evidence.movements.length === 1 ? 'entry' : 'entries'}`}>
-        <Table label="Every movement" columns={[{ says: 'When' }, { says: 'Pieces', right: true }, { says: 'Why' }, { says: 'From' }, { says: 'To' }, { says: 'By' }]} dense>
+      <Section
+        title="Every movement"
+        note={`${evidence.movements.length} ${evidence.movements.length === 1 ? 'entry' : 'entries'}`}
+      >
+        <Table
+          label="Every movement"
+          columns={[
+            { says: 'When' },
+            { says: 'Pieces', right: true },
+            { says: 'Why' },
+            { says: 'From' },
+            { says: 'To' },
+            { says: 'By' },
+          ]}
+          dense
+        >
           {evidence.movements.map((one, at) => (
             <Row key={at}>
               <Cell head="When">

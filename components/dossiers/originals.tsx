@@ -12,15 +12,33 @@ interface OriginalsProps {
 /** Every file as it was received, with the hash by which anybody can tell that it still is. */
 export function Originals({ evidence: { files, auditHead }, filesAt, filesEnd }: OriginalsProps) {
   return (
-    <Section title="Originals, kept as received" note={`${files.length} ${files.length === 1 ? 'file' : 'files'}`}>
+    <Section
+      title="Originals, kept as received"
+      note={`${files.length} ${files.length === 1 ? 'file' : 'files'}`}
+    >
       {files.length === 0 && <p className="py-3 text-quiet">No file came with this lot or its batches.</p>}
       {files.length > 0 && (
-        <Table label="Originals" columns={[{ says: 'File' }, { says: 'What it is' }, { says: 'Size', right: true }, { says: 'SHA-256' }, { says: 'Keep it', hidden: true }]} dense>
+        <Table
+          label="Originals"
+          columns={[
+            { says: 'File' },
+            { says: 'What it is' },
+            { says: 'Size', right: true },
+            { says: 'SHA-256' },
+            { says: 'Keep it', hidden: true },
+          ]}
+          dense
+        >
           {files.map((file) => (
             <Row key={file.id}>
               <Cell>
                 {mayBeShownInline(file.mediaType) ? (
-                  <a href={`${filesAt}${file.id}${filesEnd}?inline=1`} target="_blank" rel="noreferrer" className="font-medium [overflow-wrap:anywhere]">
+                  <a
+                    href={`${filesAt}${file.id}${filesEnd}?inline=1`}
+                    target="_blank"
+                    rel="noreferrer"
+                    className="font-medium [overflow-wrap:anywhere]"
+                  >
                     {file.name}
                   </a>
                 ) : (
@@ -53,7 +71,8 @@ export function Originals({ evidence: { files, auditHead }, filesAt, filesEnd }:
       )}
       {auditHead && (
         <p className="pt-2 text-source text-quiet">
-          The shop’s audit trail stood at entry <span className="num">{auditHead.seq}</span>, hash <span className="num break-all">{auditHead.hash}</span>, when this was read.
+          The shop’s audit trail stood at entry <span className="num">{auditHead.seq}</span>, hash{' '}
+          <span className="num break-all">{auditHead.hash}</span>, when this was read.
         </p>
       )}
     </Section>

@@ -24,7 +24,9 @@ export function SharedDossier({ token, opened: { evidence, forWhom, expiresAt, m
   return (
     <>
       <p className="pt-4 text-second text-quiet">
-        {shop.name} shows this to <strong className="text-ink">{forWhom}</strong>, until {dayWords(new Date(expiresAt), { zone: shop.zone, now: ALWAYS_WITH_YEAR })}. Times are those of {shop.name}.
+        {shop.name} shows this to <strong className="text-ink">{forWhom}</strong>, until{' '}
+        {dayWords(new Date(expiresAt), { zone: shop.zone, now: ALWAYS_WITH_YEAR })}. Times are those of{' '}
+        {shop.name}.
       </p>
       <PageHead
         title={
@@ -40,23 +42,34 @@ export function SharedDossier({ token, opened: { evidence, forWhom, expiresAt, m
           <Section title="Document and archive">
             {made?.documentFileId && made.archiveFileId ? (
               <p className="flex flex-wrap items-baseline gap-x-5 gap-y-1 py-1">
-                <a className="lw-word-button" href={`${files}${made.documentFileId}?inline=1`} target="_blank" rel="noreferrer">
+                <a
+                  className="lw-word-button"
+                  href={`${files}${made.documentFileId}?inline=1`}
+                  target="_blank"
+                  rel="noreferrer"
+                >
                   Document, PDF
                 </a>
                 <a className="lw-word-button" href={`${files}${made.archiveFileId}`}>
                   Archive, ZIP
                 </a>
                 <span className="text-second text-quiet">
-                  as it stood <When at={made.statedAt} zone={shop.zone} />. The archive holds every original and SHA256SUMS, which <code>sha256sum -c</code> reads.
+                  as it stood <When at={made.statedAt} zone={shop.zone} />. The archive holds every original
+                  and SHA256SUMS, which <code>sha256sum -c</code> reads.
                 </span>
               </p>
             ) : (
-              <p className="py-2 text-quiet">{shop.name} has not made them yet. Each original stands below, to read and to keep.</p>
+              <p className="py-2 text-quiet">
+                {shop.name} has not made them yet. Each original stands below, to read and to keep.
+              </p>
             )}
           </Section>
         </div>
         <Evidence evidence={evidence} filesAt={files} filesEnd="" />
-        <Caution>The dossier records; it releases nothing by itself. The drawing, the order and the governing specification at its invoked revision come first.</Caution>
+        <Caution>
+          The dossier records; it releases nothing by itself. The drawing, the order and the governing
+          specification at its invoked revision come first.
+        </Caution>
       </div>
       <PrintFoot organisation={shop.name} person={`For ${forWhom}`} />
     </>

@@ -9,7 +9,12 @@ interface FileLinkProps {
 export function FileLink({ file, className = '' }: FileLinkProps) {
   return (
     <span className={`[overflow-wrap:anywhere] ${className}`}>
-      <a href={`/api/files/${file.id}/content?inline=1`} target="_blank" rel="noreferrer" className="font-medium">
+      <a
+        href={`/api/files/${file.id}/content?inline=1`}
+        target="_blank"
+        rel="noreferrer"
+        className="font-medium"
+      >
         {file.name}
       </a>
       {file.size !== undefined && <span className="text-quiet"> {sizeWords(file.size)}</span>}

@@ -26,13 +26,36 @@ interface FileUploadProps {
 }
 
 /** Drop, choose or photograph; then see each file on its way, and what became of it. */
-export function FileUpload({ purpose, batchId, label, hint, multiple = false, camera = false, onArrived, onRemoved, error }: FileUploadProps) {
-  const { uploads, add, again, takeSame, remove } = useUploads({ purpose, ...(batchId === undefined ? {} : { batchId }) }, onArrived);
+export function FileUpload({
+  purpose,
+  batchId,
+  label,
+  hint,
+  multiple = false,
+  camera = false,
+  onArrived,
+  onRemoved,
+  error,
+}: FileUploadProps) {
+  const { uploads, add, again, takeSame, remove } = useUploads(
+    { purpose, ...(batchId === undefined ? {} : { batchId }) },
+    onArrived,
+  );
   const takes = multiple || uploads.every(({ state }) => state === 'refused');
 
   return (
     <div className="min-w-0">
-      {takes && <FileDrop label={label} hint={hint} error={error} multiple={multiple} camera={camera} accept={acceptedFiles(purpose)} onFiles={add} />}
+      {takes && (
+        <FileDrop
+          label={label}
+          hint={hint}
+          error={error}
+          multiple={multiple}
+          camera={camera}
+          accept={acceptedFiles(purpose)}
+          onFiles={add}
+        />
+      )}
       {uploads.length > 0 && (
         <ul aria-label="Files being sent" className="mt-2">
           {uploads.map((upload) => (

@@ -36,12 +36,21 @@ const TRIES = 4;
  * @throws NotSent with the sentence to show; an abort by `signal` is thrown as it is.
  */
 export async function sendFile(file: File, to: Destination, watch: Watch): Promise<FileView> {
-  const claimed = claimedKind({ purpose: to.purpose, name: file.name, mediaType: file.type, size: file.size });
+  const claimed = claimedKind({
+    purpose: to.purpose,
+    name: file.name,
+    mediaType: file.type,
+    size: file.size,
+  });
   if ('refusal' in claimed) throw new NotSent(claimed.refusal, false);
   try {
     const sha256 = await hashOf(file);
     return await withPatience(watch.signal, async () => {
-      const { file: announced, upload } = await call(requestUpload, { ...to, name: file.name, mediaType: file.type, size: file.size, sha256 }, { signal: watch.signal });
+      const { file: announced, upload } = await call(
+        requestUpload,
+        { ...to, name: file.name, mediaType: file.type, size: file.size, sha256 },
+        { signal: watch.signal },
+      );
       if (upload === null) return announced;
       await put(file, upload, watch);
       watch.onChecking();
@@ -55,7 +64,10 @@ export async function sendFile(file: File, to: Destination, watch: Watch): Promi
 
 async function hashOf(file: File): Promise<string> {
   const bytes = await file.arrayBuffer().catch(() => {
-    throw new NotSent(`${file.name} cannot be read on this device. Save it here first, then choose it again.`, true);
+    throw new NotSent(
+      `${file.name} cannot be read on this device. Save it here first, then choose it again.`,
+      true,
+    );
   });
   const hash = await crypto.subtle.digest('SHA-256', bytes);
   return [...new Uint8Array(hash)].map((byte) => byte.toString(16).padStart(2, '0')).join('');
@@ -89,13 +101,22 @@ async function withPatience<T>(signal: AbortSignal, work: () => Promise<T>): Pro
   }
 }
 
-const passes = (error: unknown): boolean => error instanceof CutOff || (error instanceof ApiError && [0, 503].includes(error.problem.status));
+const passes = (error: unknown): boolean =>
+  error instanceof CutOff || (error instanceof ApiError && [0, 503].includes(error.problem.status));
 
 function asNotSent(error: unknown, file: File): NotSent {
   if (error instanceof NotSent) return error;
-  if (error instanceof CutOff) return new NotSent(`${file.name} did not get through: the connection to the file store was cut. Try again.`, true);
+  if (error instanceof CutOff)
+    return new NotSent(
+      `${file.name} did not get through: the connection to the file store was cut. Try again.`,
+      true,
+    );
   if (!(error instanceof ApiError)) throw error;
   const { code, title, extra } = error.problem;
   const sameAs = typeof extra?.['fileId'] === 'string' ? extra['fileId'] : null;
-  return new NotSent(title, !['bad_input', 'too_large', 'not_allowed'].includes(code) && sameAs === null, sameAs);
+  return new NotSent(
+    title,
+    !['bad_input', 'too_large', 'not_allowed'].includes(code) && sameAs === null,
+    sameAs,
+  );
 }

@@ -19,7 +19,9 @@ export function UploadRow({ upload, onAgain, onUseSame, onRemove, removable }: U
   const sameAs = refusal?.sameAs ?? null;
   const isUnderWay = state === 'waiting' || state === 'sending' || state === 'checking';
   return (
-    <li className={`border-b border-rule py-2 ${refusal ? 'border-l-4 border-l-held bg-held-wash pl-3' : ''}`}>
+    <li
+      className={`border-b border-rule py-2 ${refusal ? 'border-l-4 border-l-held bg-held-wash pl-3' : ''}`}
+    >
       <div className="flex flex-wrap items-center gap-x-4 gap-y-1">
         <div className="min-w-0 flex-1 basis-60">
           <UploadState upload={upload} />
@@ -36,7 +38,11 @@ export function UploadRow({ upload, onAgain, onUseSame, onRemove, removable }: U
             </Button>
           )}
           {removable && (
-            <Button look="word" aria-label={isUnderWay ? `Stop sending ${name}` : `Remove ${name}`} onClick={onRemove}>
+            <Button
+              look="word"
+              aria-label={isUnderWay ? `Stop sending ${name}` : `Remove ${name}`}
+              onClick={onRemove}
+            >
               {isUnderWay ? 'Stop' : 'Remove'}
             </Button>
           )}
@@ -56,10 +62,26 @@ function UploadState({ upload }: { upload: Upload }) {
       </p>
     );
   }
-  if (state === 'sending') return <Progress says={`Sending ${name}`} value={sent} of={size} where={`${sizeWords(sent)} of ${sizeWords(size)}`} />;
-  const words = { waiting: 'waits for the one before it', checking: 'sent; being read back', arrived: sizeWords(size), refused: '' }[state];
+  if (state === 'sending')
+    return (
+      <Progress
+        says={`Sending ${name}`}
+        value={sent}
+        of={size}
+        where={`${sizeWords(sent)} of ${sizeWords(size)}`}
+      />
+    );
+  const words = {
+    waiting: 'waits for the one before it',
+    checking: 'sent; being read back',
+    arrived: sizeWords(size),
+    refused: '',
+  }[state];
   return (
-    <p className="flex items-start gap-2 [overflow-wrap:anywhere]" role={state === 'arrived' ? 'status' : undefined}>
+    <p
+      className="flex items-start gap-2 [overflow-wrap:anywhere]"
+      role={state === 'arrived' ? 'status' : undefined}
+    >
       {state === 'arrived' && <VerdictMark verdict="meets" size={14} className="mt-[3px] flex-none" />}
       <span>
         <strong>{name}</strong> <span className="text-quiet">{words}</span>

@@ -38,7 +38,8 @@ export function useUploads(to: Destination, onArrived: (file: FileView) => void)
     return () => all.forEach(({ stop }) => stop.abort());
   }, []);
 
-  const change = (key: number, with_: Partial<Upload>) => setUploads((all) => all.map((one) => (one.key === key ? { ...one, ...with_ } : one)));
+  const change = (key: number, with_: Partial<Upload>) =>
+    setUploads((all) => all.map((one) => (one.key === key ? { ...one, ...with_ } : one)));
   const arrive = (key: number, file: FileView) => {
     running.current.delete(key);
     change(key, { state: 'arrived', file, refusal: null });
@@ -50,11 +51,19 @@ export function useUploads(to: Destination, onArrived: (file: FileView) => void)
     if (!job || job.stop.signal.aborted) return;
     change(key, { state: 'sending', sent: 0, refusal: null });
     try {
-      const watch = { signal: job.stop.signal, onSent: (sent: number) => change(key, { sent }), onChecking: () => change(key, { state: 'checking' }) };
+      const watch = {
+        signal: job.stop.signal,
+        onSent: (sent: number) => change(key, { sent }),
+        onChecking: () => change(key, { state: 'checking' }),
+      };
       arrive(key, await sendFile(job.source, to, watch));
     } catch (error) {
       if (job.stop.signal.aborted) return;
-      change(key, { state: 'refused', refusal: error instanceof NotSent ? error : new NotSent('This file did not get through. Try again.', true) });
+      change(key, {
+        state: 'refused',
+        refusal:
+          error instanceof NotSent ? error : new NotSent('This file did not get through. Try again.', true),
+      });
     }
   };
   const queue = (key: number) => {
@@ -67,7 +76,10 @@ export function useUploads(to: Destination, onArrived: (file: FileView) => void)
       for (const source of files) {
         const key = (lastKey.current += 1);
         running.current.set(key, { source, stop: new AbortController() });
-        setUploads((all) => [...all, { key, name: source.name, size: source.size, state: 'waiting', sent: 0, refusal: null, file: null }]);
+        setUploads((all) => [
+          ...all,
+          { key, name: source.name, size: source.size, state: 'waiting', sent: 0, refusal: null, file: null },
+        ]);
         queue(key);
       }
     },

@@ -20,7 +20,8 @@ export function AfterPaid({ invoice }: { invoice: InvoiceDetail }) {
         <strong className="num">{pieces}</strong> {pieces === 1 ? 'piece' : 'pieces'} may go to stock
         {(gate?.assemblies ?? []).map((assembly) => (
           <span key={assembly.name}>
-            ; <strong>{assembly.name}</strong> has <strong className="num">{assembly.ready}</strong> of {assembly.needed}
+            ; <strong>{assembly.name}</strong> has <strong className="num">{assembly.ready}</strong> of{' '}
+            {assembly.needed}
           </span>
         ))}
         .

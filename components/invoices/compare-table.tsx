@@ -42,7 +42,11 @@ export function CompareTable({ invoice }: { invoice: InvoiceDetail }) {
               {amountText(totalMinor ?? 0)}
             </Cell>
             <Cell className={EDGE}>
-              <OverWords over={over} all={differences.length} open={differences.filter((one) => one.clearance === null).length} />
+              <OverWords
+                over={over}
+                all={differences.length}
+                open={differences.filter((one) => one.clearance === null).length}
+              />
             </Cell>
           </Row>
         </tbody>
@@ -125,7 +129,8 @@ function Head({ currency }: { currency: string }) {
 function CompareLine({ row, invoice }: { row: CompareRow; invoice: InvoiceDetail }) {
   const { ordered, accepted, invoiced, differences } = row;
   const asks = differences.some((one) => one.clearance === null);
-  const has = (code: string) => (differences.some((one) => one.code === code) ? 'font-semibold text-held-ink' : '');
+  const has = (code: string) =>
+    differences.some((one) => one.code === code) ? 'font-semibold text-held-ink' : '';
   return (
     <Row state={asks ? 'asks' : 'rest'} className="[&>td]:align-top">
       <Cell figure className="text-faint">
@@ -167,16 +172,28 @@ function CompareLine({ row, invoice }: { row: CompareRow; invoice: InvoiceDetail
 }
 
 /** Said before a sum where the row is a block: what it is, unless the pieces before it said so. */
-const sumHead = (what: string, side: { pieces: number | null } | null): string => (side?.pieces == null ? what : 'makes');
+const sumHead = (what: string, side: { pieces: number | null } | null): string =>
+  side?.pieces == null ? what : 'makes';
 
-const money = (minor: number | null | undefined): string => (minor === null || minor === undefined ? '' : amountText(minor));
+const money = (minor: number | null | undefined): string =>
+  minor === null || minor === undefined ? '' : amountText(minor);
 
 function Says({ row, invoice }: { row: CompareRow; invoice: InvoiceDetail }) {
-  if (row.differences.length === 0) return row.invoiced ? <VerdictWord verdict="meets" says="agrees" /> : <span className="text-quiet">not invoiced</span>;
+  if (row.differences.length === 0)
+    return row.invoiced ? (
+      <VerdictWord verdict="meets" says="agrees" />
+    ) : (
+      <span className="text-quiet">not invoiced</span>
+    );
   return (
     <>
       {row.differences.map((difference) => (
-        <Difference key={difference.key} invoice={invoice} difference={difference} accepted={row.accepted?.pieces ?? null} />
+        <Difference
+          key={difference.key}
+          invoice={invoice}
+          difference={difference}
+          accepted={row.accepted?.pieces ?? null}
+        />
       ))}
     </>
   );

@@ -6,7 +6,12 @@ import { Button, ButtonLink } from '@/components/ui/button';
 import { TextField } from '@/components/ui/field';
 import { VerdictMark } from '@/components/ui/marks';
 import { momentWords } from '@/lib/day-words';
-import { clearDifference, undoClearance, type InvoiceDetail, type InvoiceDifference } from '@/lib/invoices/contract';
+import {
+  clearDifference,
+  undoClearance,
+  type InvoiceDetail,
+  type InvoiceDifference,
+} from '@/lib/invoices/contract';
 import { amountText } from '@/lib/money';
 
 import { useInvoiceWrite } from './use-invoice-write';
@@ -24,15 +29,25 @@ export function Difference({ invoice, difference, accepted }: DifferenceProps) {
   return (
     <div className="py-0.5">
       <p className="flex gap-2">
-        {overMinor > 0 && <strong className={`num ${clearance ? '' : 'text-held-ink'}`}>{amountText(overMinor)}</strong>}
+        {overMinor > 0 && (
+          <strong className={`num ${clearance ? '' : 'text-held-ink'}`}>{amountText(overMinor)}</strong>
+        )}
         <span className={clearance ? '' : 'font-semibold text-held-ink'}>{sentence}</span>
       </p>
-      {clearance ? <Cleared invoice={invoice} difference={difference} clearance={clearance} /> : <WaysOut invoice={invoice} difference={difference} accepted={accepted} />}
+      {clearance ? (
+        <Cleared invoice={invoice} difference={difference} clearance={clearance} />
+      ) : (
+        <WaysOut invoice={invoice} difference={difference} accepted={accepted} />
+      )}
     </div>
   );
 }
 
-function Cleared({ invoice, difference, clearance }: Omit<DifferenceProps, 'accepted'> & { clearance: NonNullable<InvoiceDifference['clearance']> }) {
+function Cleared({
+  invoice,
+  difference,
+  clearance,
+}: Omit<DifferenceProps, 'accepted'> & { clearance: NonNullable<InvoiceDifference['clearance']> }) {
   const clock = useClock();
   const mayEnter = useMay('invoice.enter');
   const { run } = useInvoiceWrite(undoClearance);
@@ -42,7 +57,11 @@ function Cleared({ invoice, difference, clearance }: Omit<DifferenceProps, 'acce
       <VerdictMark verdict="meets" size={12} className="mr-1 inline align-[-1px]" />
       {clearance.by} {chose}, {momentWords(new Date(clearance.at), clock)}.{' '}
       {mayEnter && invoice.approved === null && (
-        <Button look="word" aria-label={`Undo: ${difference.sentence}`} onClick={() => run({ invoiceId: invoice.id, version: invoice.version, difference: difference.key })}>
+        <Button
+          look="word"
+          aria-label={`Undo: ${difference.sentence}`}
+          onClick={() => run({ invoiceId: invoice.id, version: invoice.version, difference: difference.key })}
+        >
           Undo
         </Button>
       )}
@@ -50,7 +69,8 @@ function Cleared({ invoice, difference, clearance }: Omit<DifferenceProps, 'acce
   );
 }
 
-const leftOutWords = ({ overMinor }: InvoiceDifference): string => (overMinor > 0 ? `left ${amountText(overMinor)} out` : 'took the total as it stands');
+const leftOutWords = ({ overMinor }: InvoiceDifference): string =>
+  overMinor > 0 ? `left ${amountText(overMinor)} out` : 'took the total as it stands';
 
 function WaysOut({ invoice, difference, accepted }: DifferenceProps) {
   const mayEnter = useMay('invoice.enter');
@@ -66,8 +86,16 @@ function WaysOut({ invoice, difference, accepted }: DifferenceProps) {
       </div>
     );
   }
-  const clear = (choice: 'accept' | 'withhold', reason = '') => run({ invoiceId: invoice.id, version: invoice.version, difference: difference.key, choice, reason });
-  if (accepting) return <Accepting difference={difference} onAccept={(reason) => clear('accept', reason)} onLeave={() => setAccepting(false)} />;
+  const clear = (choice: 'accept' | 'withhold', reason = '') =>
+    run({ invoiceId: invoice.id, version: invoice.version, difference: difference.key, choice, reason });
+  if (accepting)
+    return (
+      <Accepting
+        difference={difference}
+        onAccept={(reason) => clear('accept', reason)}
+        onLeave={() => setAccepting(false)}
+      />
+    );
   return (
     <div className="flex flex-wrap gap-2 pt-1.5">
       <Button size="small" onClick={() => clear('withhold')}>
@@ -82,12 +110,21 @@ function WaysOut({ invoice, difference, accepted }: DifferenceProps) {
 
 function withholdWords({ code, overMinor }: InvoiceDifference, accepted: number | null): string {
   if (overMinor === 0) return 'Take the total as it stands';
-  if (code === 'quantity_above_accepted' && accepted !== null) return `Pay ${accepted}, leave ${amountText(overMinor)} out`;
+  if (code === 'quantity_above_accepted' && accepted !== null)
+    return `Pay ${accepted}, leave ${amountText(overMinor)} out`;
   if (code === 'unit_price_mismatch') return `Pay the order’s price, ${amountText(overMinor)} less`;
   return `Leave ${amountText(overMinor)} out`;
 }
 
-function Accepting({ difference, onAccept, onLeave }: { difference: InvoiceDifference; onAccept: (reason: string) => Promise<unknown>; onLeave: () => void }) {
+function Accepting({
+  difference,
+  onAccept,
+  onLeave,
+}: {
+  difference: InvoiceDifference;
+  onAccept: (reason: string) => Promise<unknown>;
+  onLeave: () => void;
+}) {
   const [reason, setReason] = useState('');
   const [error, setError] = useState<string>();
   const accept = async () => {
@@ -104,7 +141,14 @@ function Accepting({ difference, onAccept, onLeave }: { difference: InvoiceDiffe
         void accept();
       }}
     >
-      <TextField label={`Reason for paying ${amountText(difference.overMinor)}`} autoFocus maxLength={500} value={reason} error={error} onChange={(event) => setReason(event.currentTarget.value)} />
+      <TextField
+        label={`Reason for paying ${amountText(difference.overMinor)}`}
+        autoFocus
+        maxLength={500}
+        value={reason}
+        error={error}
+        onChange={(event) => setReason(event.currentTarget.value)}
+      />
       <div className="flex gap-2">
         <Button size="small" type="submit">
           Accept {amountText(difference.overMinor)}

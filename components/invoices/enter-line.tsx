@@ -28,17 +28,47 @@ export function EnterLine({ at, invoice, onRemove }: EnterLineProps) {
     const { pieces, unitPriceMinor } = form.getValues(`lines.${at}`);
     const each = parseAmount(unitPriceMinor);
     const count = Number(pieces);
-    if (each !== null && Number.isInteger(count) && count >= 0) form.setValue(`lines.${at}.amountMinor`, typedAmount(count * each), { shouldDirty: false });
+    if (each !== null && Number.isInteger(count) && count >= 0)
+      form.setValue(`lines.${at}.amountMinor`, typedAmount(count * each), { shouldDirty: false });
   };
   return (
     <fieldset className="border-b border-rule py-3">
       <legend className="sr-only">Line {at + 1}</legend>
       <div className="grid grid-cols-2 items-start gap-x-3 gap-y-2 sm:grid-cols-[minmax(0,1fr)_5rem_6rem_7rem]">
-        <SelectField className="col-span-2 sm:col-span-1" label={`Line ${at + 1} is`} options={optionsOf(invoice)} {...form.register(`lines.${at}.what`)} />
-        {isPieces && <NumberInput label="Pieces" inputMode="numeric" error={errors?.pieces?.message} {...form.register(`lines.${at}.pieces`, { onChange: follow })} />}
-        {isPieces && <NumberInput label="Each" error={errors?.unitPriceMinor?.message} {...form.register(`lines.${at}.unitPriceMinor`, { onChange: follow })} />}
-        <NumberInput className={isPieces ? '' : 'sm:col-start-4'} label="Amount" error={errors?.amountMinor?.message} {...form.register(`lines.${at}.amountMinor`)} />
-        <TextField className="col-span-2 sm:col-span-3" label="As it says" error={errors?.description?.message} maxLength={200} {...form.register(`lines.${at}.description`)} />
+        <SelectField
+          className="col-span-2 sm:col-span-1"
+          label={`Line ${at + 1} is`}
+          options={optionsOf(invoice)}
+          {...form.register(`lines.${at}.what`)}
+        />
+        {isPieces && (
+          <NumberInput
+            label="Pieces"
+            inputMode="numeric"
+            error={errors?.pieces?.message}
+            {...form.register(`lines.${at}.pieces`, { onChange: follow })}
+          />
+        )}
+        {isPieces && (
+          <NumberInput
+            label="Each"
+            error={errors?.unitPriceMinor?.message}
+            {...form.register(`lines.${at}.unitPriceMinor`, { onChange: follow })}
+          />
+        )}
+        <NumberInput
+          className={isPieces ? '' : 'sm:col-start-4'}
+          label="Amount"
+          error={errors?.amountMinor?.message}
+          {...form.register(`lines.${at}.amountMinor`)}
+        />
+        <TextField
+          className="col-span-2 sm:col-span-3"
+          label="As it says"
+          error={errors?.description?.message}
+          maxLength={200}
+          {...form.register(`lines.${at}.description`)}
+        />
         {onRemove && (
           <span className="self-center pt-4 sm:text-right">
             <Button look="word" aria-label={`Remove line ${at + 1}`} onClick={onRemove}>
@@ -54,7 +84,10 @@ export function EnterLine({ at, invoice, onRemove }: EnterLineProps) {
 const CHARGES = ['lot_minimum', 'certification', 'freight', 'tax', 'other'] as const;
 
 const optionsOf = ({ order }: InvoiceDetail) => [
-  ...order.lines.map((line) => ({ value: whatOf(line.lineId), says: `${line.lineNo}: ${orderLineWords(line)}` })),
+  ...order.lines.map((line) => ({
+    value: whatOf(line.lineId),
+    says: `${line.lineNo}: ${orderLineWords(line)}`,
+  })),
   { value: OTHER_PIECES, says: 'Pieces that are not on the order' },
   ...CHARGES.map((kind) => ({ value: kind, says: LINE_KIND_WORDS[kind] })),
 ];

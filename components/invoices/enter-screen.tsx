@@ -15,11 +15,14 @@ export function EnterScreen({ invoice }: { invoice: InvoiceDetail }) {
   return (
     <>
       <PageHead
-        tag={<BatchTag stage={invoice.stage} number={invoice.batchNumber} href={`/batches/${invoice.batchId}`} />}
+        tag={
+          <BatchTag stage={invoice.stage} number={invoice.batchNumber} href={`/batches/${invoice.batchId}`} />
+        }
         title={invoice.number === null ? 'Enter the invoice' : `Enter invoice ${invoice.number} again`}
         sub={
           <>
-            {invoice.processor}, order <span className="num">{invoice.orderNumber}</span>. The lines stand as ordered; change what the paper says otherwise.
+            {invoice.processor}, order <span className="num">{invoice.orderNumber}</span>. The lines stand as
+            ordered; change what the paper says otherwise.
           </>
         }
       />

@@ -15,14 +15,22 @@ const Line = z
     /** A line of the order by its id, or the kind of a charge. */
     what: z.string(),
     description: z.string().trim().min(1, 'Say what it is for.').max(200, 'Write 200 characters or less.'),
-    pieces: optionalNumberField({ name: 'Pieces', example: '41' }).pipe(z.int('Enter a whole number of pieces.').min(0, 'Pieces cannot be below 0.').max(1_000_000, 'Enter 1,000,000 or less.').nullable()),
+    pieces: optionalNumberField({ name: 'Pieces', example: '41' }).pipe(
+      z
+        .int('Enter a whole number of pieces.')
+        .min(0, 'Pieces cannot be below 0.')
+        .max(1_000_000, 'Enter 1,000,000 or less.')
+        .nullable(),
+    ),
     unitPriceMinor: optionalAmountField({ name: 'The price' }),
     amountMinor: amountField({ name: 'The amount', mayBeNegative: true }),
   })
   .superRefine((line, issues) => {
     if (kindOf(line.what) !== 'pieces') return;
-    if (line.pieces === null) issues.addIssue({ code: 'custom', path: ['pieces'], message: 'Enter the pieces.' });
-    if (line.unitPriceMinor === null) issues.addIssue({ code: 'custom', path: ['unitPriceMinor'], message: 'Enter the price.' });
+    if (line.pieces === null)
+      issues.addIssue({ code: 'custom', path: ['pieces'], message: 'Enter the pieces.' });
+    if (line.unitPriceMinor === null)
+      issues.addIssue({ code: 'custom', path: ['unitPriceMinor'], message: 'Enter the price.' });
   });
 
 /** What is typed of an invoice, under the names that the server uses for its own refusals. */
@@ -48,7 +56,9 @@ export function linesOf(lines: EnterOut['lines']): InvoiceLineInput[] {
   return lines.map(({ what, pieces, unitPriceMinor, ...line }) => {
     const kind = kindOf(what);
     const lineId = what.slice(PIECES.length);
-    return kind === 'pieces' ? { ...line, kind, lineId: lineId === '' ? null : lineId, pieces, unitPriceMinor } : { ...line, kind, lineId: null, pieces: null, unitPriceMinor: null };
+    return kind === 'pieces'
+      ? { ...line, kind, lineId: lineId === '' ? null : lineId, pieces, unitPriceMinor }
+      : { ...line, kind, lineId: null, pieces: null, unitPriceMinor: null };
   });
 }
 
@@ -80,7 +90,10 @@ function asOrdered(order: InvoiceDetail['order']): EnterIn['lines'] {
     unitPriceMinor: typedAmount(line.unitPriceMinor),
     amountMinor: typedAmount(line.ordered * line.unitPriceMinor),
   }));
-  const toMinimum = order.expectedMinor - order.certificationFeeMinor - order.lines.reduce((sum, line) => sum + line.ordered * line.unitPriceMinor, 0);
+  const toMinimum =
+    order.expectedMinor -
+    order.certificationFeeMinor -
+    order.lines.reduce((sum, line) => sum + line.ordered * line.unitPriceMinor, 0);
   const charges = [
     { kind: 'lot_minimum' as const, minor: toMinimum },
     { kind: 'certification' as const, minor: order.certificationFeeMinor },
@@ -88,6 +101,13 @@ function asOrdered(order: InvoiceDetail['order']): EnterIn['lines'] {
   return [...work, ...charges.map(({ kind, minor }) => emptyLine(kind, typedAmount(minor)))];
 }
 
-export const orderLineWords = (line: InvoiceDetail['order']['lines'][number]): string => `${line.partNumber} ${line.partRevision}, ${line.partName}`;
+export const orderLineWords = (line: InvoiceDetail['order']['lines'][number]): string =>
+  `${line.partNumber} ${line.partRevision}, ${line.partName}`;
 
-export const emptyLine = (kind: Exclude<Kind, 'pieces'>, amountMinor = ''): EnterIn['lines'][number] => ({ what: kind, description: kind === 'other' ? '' : LINE_KIND_WORDS[kind], pieces: '', unitPriceMinor: '', amountMinor });
+export const emptyLine = (kind: Exclude<Kind, 'pieces'>, amountMinor = ''): EnterIn['lines'][number] => ({
+  what: kind,
+  description: kind === 'other' ? '' : LINE_KIND_WORDS[kind],
+  pieces: '',
+  unitPriceMinor: '',
+  amountMinor,
+});

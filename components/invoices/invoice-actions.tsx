@@ -32,7 +32,9 @@ export function InvoiceActions({ invoice }: { invoice: InvoiceDetail }) {
               Refuse invoice
             </Button>
           )}
-          {mayCredit && open !== 'credit' && <Button onClick={() => setOpen('credit')}>Enter a credit</Button>}
+          {mayCredit && open !== 'credit' && (
+            <Button onClick={() => setOpen('credit')}>Enter a credit</Button>
+          )}
         </div>
       )}
       {open === 'credit' && mayCredit && <CreditForm invoice={invoice} onDone={() => setOpen(null)} />}
@@ -57,7 +59,11 @@ function Now({ invoice }: { invoice: InvoiceDetail }) {
     case 'payment_failed':
       return (
         <>
-          <Failing says={`${amountText(last?.amountMinor ?? 0)} was not paid.`} stands={last?.failure} again="It can be paid again, as it is or with another saved method." />
+          <Failing
+            says={`${amountText(last?.amountMinor ?? 0)} was not paid.`}
+            stands={last?.failure}
+            again="It can be paid again, as it is or with another saved method."
+          />
           <PayButton invoice={invoice} />
         </>
       );
@@ -65,16 +71,23 @@ function Now({ invoice }: { invoice: InvoiceDetail }) {
       return (
         <div role="status">
           <Edge level="warn">
-            <strong>{amountText(last?.amountMinor ?? 0)} is being paid</strong>, started {last && momentWords(new Date(last.startedAt), clock)} by {last?.by}.{' '}
-            {last?.handedOver === false ? 'It is on its way to the payment service; while that does not answer, it is tried again by itself.' : 'The payment service has it and tells us how it ends; a bank transfer may take days.'} This page follows by itself.
+            <strong>{amountText(last?.amountMinor ?? 0)} is being paid</strong>, started{' '}
+            {last && momentWords(new Date(last.startedAt), clock)} by {last?.by}.{' '}
+            {last?.handedOver === false
+              ? 'It is on its way to the payment service; while that does not answer, it is tried again by itself.'
+              : 'The payment service has it and tells us how it ends; a bank transfer may take days.'}{' '}
+            This page follows by itself.
           </Edge>
         </div>
       );
     case 'paid':
       return (
         <p role="status">
-          <strong className="text-proved-ink">{last?.state === 'succeeded' ? `Paid ${amountText(last.amountMinor)}` : 'Nothing is left to pay'}</strong>
-          {last?.endedAt && `, ${momentWords(new Date(last.endedAt), clock)}. The remittance is mailed to ${invoice.processor}.`}
+          <strong className="text-proved-ink">
+            {last?.state === 'succeeded' ? `Paid ${amountText(last.amountMinor)}` : 'Nothing is left to pay'}
+          </strong>
+          {last?.endedAt &&
+            `, ${momentWords(new Date(last.endedAt), clock)}. The remittance is mailed to ${invoice.processor}.`}
         </p>
       );
     case 'refused':
@@ -89,10 +102,23 @@ function Now({ invoice }: { invoice: InvoiceDetail }) {
 function Approve({ invoice }: { invoice: InvoiceDetail }) {
   const mayApprove = useMay('invoice.approve');
   const { run } = useInvoiceWrite(approveInvoice);
-  const waiting = invoice.differences.filter((one) => one.clearance === null).map((one) => (one.seq === null ? 'the whole' : `line ${one.seq}`));
-  const notNow = waiting.length > 0 ? `Approve waits for ${[...new Set(waiting)].join(' and ')}.` : !mayApprove && 'The office approves.';
+  const waiting = invoice.differences
+    .filter((one) => one.clearance === null)
+    .map((one) => (one.seq === null ? 'the whole' : `line ${one.seq}`));
+  const notNow =
+    waiting.length > 0
+      ? `Approve waits for ${[...new Set(waiting)].join(' and ')}.`
+      : !mayApprove && 'The office approves.';
   return (
-    <Button look="primary" size="big" className="w-full" notNow={notNow} reasonAt="below" busyLabel="Approving" onClick={() => run({ invoiceId: invoice.id, version: invoice.version })}>
+    <Button
+      look="primary"
+      size="big"
+      className="w-full"
+      notNow={notNow}
+      reasonAt="below"
+      busyLabel="Approving"
+      onClick={() => run({ invoiceId: invoice.id, version: invoice.version })}
+    >
       Approve {amountText(payableNow(invoice))}
     </Button>
   );
@@ -102,7 +128,15 @@ function ApproveSecond({ invoice }: { invoice: InvoiceDetail }) {
   const maySecond = useMay('invoice.approve_second');
   const { run } = useInvoiceWrite(approveInvoiceSecond);
   return (
-    <Button look="primary" size="big" className="w-full" notNow={whyNotSecond(invoice, maySecond)} reasonAt="below" busyLabel="Approving" onClick={() => run({ invoiceId: invoice.id, version: invoice.version })}>
+    <Button
+      look="primary"
+      size="big"
+      className="w-full"
+      notNow={whyNotSecond(invoice, maySecond)}
+      reasonAt="below"
+      busyLabel="Approving"
+      onClick={() => run({ invoiceId: invoice.id, version: invoice.version })}
+    >
       Approve {amountText(payableNow(invoice))} a second time
     </Button>
   );

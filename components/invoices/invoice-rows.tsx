@@ -20,7 +20,16 @@ interface InvoiceRowsProps {
 
 /** Invoices, each with what is to be done with it next. */
 export function InvoiceRows({ rows, label, ofOneBatch = false }: InvoiceRowsProps) {
-  const columns = [{ says: 'Invoice' }, ...(ofOneBatch ? [] : [{ says: 'Batch' }, { says: 'From' }]), { says: 'Order' }, { says: 'Dated' }, { says: 'Due' }, { says: 'Invoiced', right: true }, { says: 'Left to pay', right: true }, { says: 'Next' }];
+  const columns = [
+    { says: 'Invoice' },
+    ...(ofOneBatch ? [] : [{ says: 'Batch' }, { says: 'From' }]),
+    { says: 'Order' },
+    { says: 'Dated' },
+    { says: 'Due' },
+    { says: 'Invoiced', right: true },
+    { says: 'Left to pay', right: true },
+    { says: 'Next' },
+  ];
   return (
     <Table label={label} columns={columns}>
       {rows.map((row) => (
@@ -61,7 +70,11 @@ function InvoiceLine({ row, ofOneBatch }: { row: InvoiceRow; ofOneBatch: boolean
       <Cell figure head="Left to pay">
         {row.balanceMinor > 0 ? amountText(row.balanceMinor) : ''}
       </Cell>
-      <Cell strong={isOpen} quiet={!isOpen} className={STATES_IN_RED.includes(row.state) ? 'text-held-ink' : ''}>
+      <Cell
+        strong={isOpen}
+        quiet={!isOpen}
+        className={STATES_IN_RED.includes(row.state) ? 'text-held-ink' : ''}
+      >
         {INVOICE_STATE_WORDS[row.state]}
       </Cell>
     </Row>

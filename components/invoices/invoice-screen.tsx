@@ -30,13 +30,26 @@ export function InvoiceScreen({ invoiceId, entering }: { invoiceId: string; ente
   const { data: invoice } = useRead(getInvoice, { invoiceId });
   const mayEnter = useMay('invoice.enter');
   useFollowed(invoice);
-  if (mayEnter && invoice.approved === null && invoice.state !== 'refused' && (entering || invoice.state === 'to_enter')) return <EnterScreen key={invoice.version} invoice={invoice} />;
+  if (
+    mayEnter &&
+    invoice.approved === null &&
+    invoice.state !== 'refused' &&
+    (entering || invoice.state === 'to_enter')
+  )
+    return <EnterScreen key={invoice.version} invoice={invoice} />;
   return (
     <>
       <InvoiceHead invoice={invoice} mayEnter={mayEnter} />
       {invoice.totalMinor === null ? (
         <>
-          <Empty says="Nothing is entered yet." comes={invoice.state === 'refused' ? 'It was refused as it came.' : 'The office enters what it says; then it is held against the order.'} />
+          <Empty
+            says="Nothing is entered yet."
+            comes={
+              invoice.state === 'refused'
+                ? 'It was refused as it came.'
+                : 'The office enters what it says; then it is held against the order.'
+            }
+          />
           <Steps invoice={invoice} />
         </>
       ) : (
@@ -75,7 +88,9 @@ function useFollowed({ id, state }: InvoiceDetail): void {
   const before = useRef(state);
   useLazyRead(getInvoice, { invoiceId: id }, { enabled: state === 'paying', refreshEveryMs: EVERY_MS });
   useEffect(() => {
-    if (before.current === 'paying' && state !== 'paying') for (const read of [getGate, listAudit, listInvoices]) void cache.invalidateQueries({ queryKey: [read.id] });
+    if (before.current === 'paying' && state !== 'paying')
+      for (const read of [getGate, listAudit, listInvoices])
+        void cache.invalidateQueries({ queryKey: [read.id] });
     before.current = state;
   }, [cache, state]);
 }
@@ -84,12 +99,16 @@ function InvoiceHead({ invoice, mayEnter }: { invoice: InvoiceDetail; mayEnter: 
   const { file, number, approved, state } = invoice;
   return (
     <PageHead
-      tag={<BatchTag stage={invoice.stage} number={invoice.batchNumber} href={`/batches/${invoice.batchId}`} />}
+      tag={
+        <BatchTag stage={invoice.stage} number={invoice.batchNumber} href={`/batches/${invoice.batchId}`} />
+      }
       title={number === null ? 'Invoice' : `Invoice ${number}`}
       sub={<HeadWords invoice={invoice} />}
       actions={
         <>
-          {mayEnter && approved === null && state !== 'refused' && <Link href={`/invoices/${invoice.id}?enter=1`}>Enter it again</Link>}
+          {mayEnter && approved === null && state !== 'refused' && (
+            <Link href={`/invoices/${invoice.id}?enter=1`}>Enter it again</Link>
+          )}
           {file && (
             <a href={`/api/files/${file.id}/content?inline=1`} target="_blank" rel="noreferrer">
               The page as received
@@ -109,7 +128,8 @@ function HeadWords({ invoice }: { invoice: InvoiceDetail }) {
   return (
     <>
       {invoice.processor}
-      {datedOn && `, dated ${dayWords(datedOn, clock)}`}. From {sentBy}, {momentWords(new Date(createdAt), clock)}. Order <span className="num">{invoice.orderNumber}</span>.{' '}
+      {datedOn && `, dated ${dayWords(datedOn, clock)}`}. From {sentBy},{' '}
+      {momentWords(new Date(createdAt), clock)}. Order <span className="num">{invoice.orderNumber}</span>.{' '}
       {papers.length > 0 && (papers.length === 1 ? 'Certificate ' : 'Certificates ')}
       {papers.map((paper, at) => (
         <span key={paper.id}>

@@ -24,7 +24,16 @@ export function InvoicesSection({ batchId, dispatched }: { batchId: string; disp
     <Section id="invoices" title="Invoices" note={rows.length > 0 ? rows.length : undefined}>
       {isPending && <Loading rows={2} label="Loading invoices" />}
       {error && <Failing says="The invoices could not be read." again={error.message} />}
-      {data && rows.length === 0 && <Empty says="No invoice yet." comes={dispatched ? 'The processor sends it from its page; one that came on paper is taken up here.' : 'It comes after the batch has left.'} />}
+      {data && rows.length === 0 && (
+        <Empty
+          says="No invoice yet."
+          comes={
+            dispatched
+              ? 'The processor sends it from its page; one that came on paper is taken up here.'
+              : 'It comes after the batch has left.'
+          }
+        />
+      )}
       {rows.length > 0 && <InvoiceRows rows={rows} label="Invoices of this batch" ofOneBatch />}
       {dispatched && mayEnter && !open && (
         <div className="flex flex-wrap gap-x-5 pt-2">

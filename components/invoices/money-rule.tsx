@@ -23,13 +23,39 @@ export function MoneyRule({ invoice }: { invoice: InvoiceDetail }) {
   const payable = payableNow(invoice);
   return (
     <div ref={element} className="min-w-0 pb-2">
-      <svg width={width} height={line + 24} viewBox={`0 0 ${width} ${line + 24}`} role="img" aria-label={labels.map((label) => label.says).join(', ')} className="block max-w-full overflow-visible">
+      <svg
+        width={width}
+        height={line + 24}
+        viewBox={`0 0 ${width} ${line + 24}`}
+        role="img"
+        aria-label={labels.map((label) => label.says).join(', ')}
+        className="block max-w-full overflow-visible"
+      >
         <Ticks scale={scale} place={place} line={line} width={width} />
-        {over.length > 0 && <Differences parts={over.map((one) => one.overMinor)} from={payable} to={payable + over.reduce((sum, one) => sum + one.overMinor, 0)} place={place} line={line} />}
+        {over.length > 0 && (
+          <Differences
+            parts={over.map((one) => one.overMinor)}
+            from={payable}
+            to={payable + over.reduce((sum, one) => sum + one.overMinor, 0)}
+            place={place}
+            line={line}
+          />
+        )}
         {placed.map((label) => (
           <g key={label.says}>
-            <path d={`M${label.x} ${label.row * ROW + 20}V${line}`} stroke={COLOURS[label.tone]} strokeWidth="2" />
-            <text x={label.left} y={label.row * ROW + 14} fontSize="14.5" fontWeight="600" className="font-cond" style={{ fill: COLOURS[label.tone] }}>
+            <path
+              d={`M${label.x} ${label.row * ROW + 20}V${line}`}
+              stroke={COLOURS[label.tone]}
+              strokeWidth="2"
+            />
+            <text
+              x={label.left}
+              y={label.row * ROW + 14}
+              fontSize="14.5"
+              fontWeight="600"
+              className="font-cond"
+              style={{ fill: COLOURS[label.tone] }}
+            >
               {label.says}
             </text>
           </g>
@@ -53,7 +79,11 @@ function labelsOf(invoice: InvoiceDetail): RuleLabel[] {
   const sums = [...new Set(marks.map((mark) => mark.at))];
   return sums.map((at) => {
     const here = marks.filter((mark) => mark.at === at);
-    return { at, says: `${here.map((mark) => mark.name).join(', ')} ${amountText(at)}`, tone: here.find((mark) => mark.tone === 'held')?.tone ?? here[0]?.tone ?? 'ink' };
+    return {
+      at,
+      says: `${here.map((mark) => mark.name).join(', ')} ${amountText(at)}`,
+      tone: here.find((mark) => mark.tone === 'held')?.tone ?? here[0]?.tone ?? 'ink',
+    };
   });
 }
 
@@ -62,7 +92,12 @@ interface Drawn {
   line: number;
 }
 
-function Ticks({ scale: { from, to, tick, number }, place, line, width }: Drawn & { scale: MoneyScale; width: number }) {
+function Ticks({
+  scale: { from, to, tick, number },
+  place,
+  line,
+  width,
+}: Drawn & { scale: MoneyScale; width: number }) {
   const count = Math.round((to - from) / tick);
   const anchor = (at: number) => {
     if (at === from) return 'start';
@@ -76,7 +111,13 @@ function Ticks({ scale: { from, to, tick, number }, place, line, width }: Drawn 
           <g key={at}>
             <path d={`M${place(at)} ${line}v${isLong ? 8 : 4}`} stroke="var(--line)" />
             {isLong && (
-              <text x={place(at)} y={line + 21} fontSize="11" textAnchor={anchor(at)} className="fill-faint font-mono">
+              <text
+                x={place(at)}
+                y={line + 21}
+                fontSize="11"
+                textAnchor={anchor(at)}
+                className="fill-faint font-mono"
+              >
                 {(at / 100).toLocaleString('en-US')}
               </text>
             )}
@@ -90,18 +131,40 @@ function Ticks({ scale: { from, to, tick, number }, place, line, width }: Drawn 
 
 const COUNTS = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eight', 'nine'];
 
-function Differences({ parts, from, to, place, line }: Drawn & { parts: readonly number[]; from: number; to: number }) {
+function Differences({
+  parts,
+  from,
+  to,
+  place,
+  line,
+}: Drawn & { parts: readonly number[]; from: number; to: number }) {
   const [x, end] = [place(from), place(to)];
   const words = `${amountText(to - from)} in ${COUNTS[parts.length] ?? parts.length} ${parts.length === 1 ? 'difference' : 'differences'}`;
-  const inside = parts.slice(0, -1).map((_, at) => place(from + parts.slice(0, at + 1).reduce((sum, one) => sum + one, 0)));
+  const inside = parts
+    .slice(0, -1)
+    .map((_, at) => place(from + parts.slice(0, at + 1).reduce((sum, one) => sum + one, 0)));
   return (
     <>
-      <rect x={x} y={line - 12} width={Math.max(1, end - x)} height="12" fill="var(--held-wash)" stroke="var(--held-ink)" />
+      <rect
+        x={x}
+        y={line - 12}
+        width={Math.max(1, end - x)}
+        height="12"
+        fill="var(--held-wash)"
+        stroke="var(--held-ink)"
+      />
       {inside.map((at) => (
         <path key={at} d={`M${at} ${line - 12}v12`} stroke="var(--held-ink)" />
       ))}
       {end - x > words.length * 6.6 && (
-        <text x={(x + end) / 2} y={line - 16} fontSize="13" textAnchor="middle" className="font-cond" style={{ fill: 'var(--held-ink)' }}>
+        <text
+          x={(x + end) / 2}
+          y={line - 16}
+          fontSize="13"
+          textAnchor="middle"
+          className="font-cond"
+          style={{ fill: 'var(--held-ink)' }}
+        >
           {words}
         </text>
       )}
@@ -116,7 +179,9 @@ function useWidth(drawnFor: number) {
   useEffect(() => {
     const watched = element.current;
     if (!watched) return;
-    const observer = new ResizeObserver(([entry]) => setWidth(Math.max(240, Math.floor(entry?.contentRect.width ?? drawnFor))));
+    const observer = new ResizeObserver(([entry]) =>
+      setWidth(Math.max(240, Math.floor(entry?.contentRect.width ?? drawnFor))),
+    );
     observer.observe(watched);
     return () => observer.disconnect();
   }, [drawnFor]);

@@ -36,7 +36,11 @@ export interface PlacedLabel extends RuleLabel {
 }
 
 /** Marks at one sum share a label; labels that would touch stand in rows above each other. */
-export function placeLabels(labels: readonly RuleLabel[], placeOf: (at: number) => number, width: number): PlacedLabel[] {
+export function placeLabels(
+  labels: readonly RuleLabel[],
+  placeOf: (at: number) => number,
+  width: number,
+): PlacedLabel[] {
   const ends: number[] = [];
   return [...labels]
     .sort((a, b) => a.at - b.at)

@@ -24,7 +24,14 @@ export function PayButton({ invoice }: { invoice: InvoiceDetail }) {
   };
   return (
     <>
-      <Button look="primary" size="big" className="w-full" notNow={whyNot(invoice, mayPay)} reasonAt="below" onClick={() => setOpen(true)}>
+      <Button
+        look="primary"
+        size="big"
+        className="w-full"
+        notNow={whyNot(invoice, mayPay)}
+        reasonAt="below"
+        onClick={() => setOpen(true)}
+      >
         {says}
       </Button>
       {mayPay && !payable.methodSaved && (
@@ -56,5 +63,8 @@ function whyNot({ payable, processor }: InvoiceDetail, mayPay: boolean): string 
   if (!mayPay) return 'The office pays.';
   if (payable.otherHands) return 'You approved it. In this shop another person pays what one has approved.';
   if (!payable.methodSaved) return 'The shop has no way to pay yet. An admin saves one.';
-  return !payable.processorReady && `${processor} has not said where its money goes. It does so on its own page, under Account.`;
+  return (
+    !payable.processorReady &&
+    `${processor} has not said where its money goes. It does so on its own page, under Account.`
+  );
 }

@@ -41,7 +41,13 @@ export function RefuseDialog({ invoice, open, onClose }: RefuseDialogProps) {
         </>
       }
     >
-      <TextArea label="Reason" maxLength={500} value={reason} error={error} onChange={(event) => setReason(event.currentTarget.value)} />
+      <TextArea
+        label="Reason"
+        maxLength={500}
+        value={reason}
+        error={error}
+        onChange={(event) => setReason(event.currentTarget.value)}
+      />
     </Dialog>
   );
 }

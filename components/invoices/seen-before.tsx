@@ -16,16 +16,35 @@ const MOST_NAMED = 3;
 export function SeenBefore({ invoice }: { invoice: InvoiceDetail }) {
   const { number, processor, orderNumber, totalMinor, file } = invoice;
   const checks: { why: Why; met: string; found: string }[] = [
-    { why: 'same_number', met: `Number ${number ?? ''} is new from ${processor}`, found: `Number ${number ?? ''} was here before` },
-    { why: 'same_order', met: `No other invoice names ${orderNumber}`, found: `${orderNumber} has another invoice` },
-    { why: 'same_total', met: `No other with ${amountText(totalMinor ?? 0)} in 90 days`, found: `Another with ${amountText(totalMinor ?? 0)} in 90 days` },
-    ...(file ? [{ why: 'same_file' as const, met: 'The file is new', found: 'The same file came before' }] : []),
+    {
+      why: 'same_number',
+      met: `Number ${number ?? ''} is new from ${processor}`,
+      found: `Number ${number ?? ''} was here before`,
+    },
+    {
+      why: 'same_order',
+      met: `No other invoice names ${orderNumber}`,
+      found: `${orderNumber} has another invoice`,
+    },
+    {
+      why: 'same_total',
+      met: `No other with ${amountText(totalMinor ?? 0)} in 90 days`,
+      found: `Another with ${amountText(totalMinor ?? 0)} in 90 days`,
+    },
+    ...(file
+      ? [{ why: 'same_file' as const, met: 'The file is new', found: 'The same file came before' }]
+      : []),
   ];
   return (
     <Section title="Seen before?">
       <ul className="flex flex-wrap gap-x-7 gap-y-1.5 pt-2 text-second">
         {checks.map(({ why, met, found }) => (
-          <Check key={why} met={met} found={found} others={invoice.seenBefore.filter((one) => one.why === why)} />
+          <Check
+            key={why}
+            met={met}
+            found={found}
+            others={invoice.seenBefore.filter((one) => one.why === why)}
+          />
         ))}
       </ul>
     </Section>

@@ -53,21 +53,41 @@ function stepsOf(invoice: InvoiceDetail, at: (moment: string) => string): Step[]
   const { state, approved, secondApproved, secondApprovalAboveMinor: above, differences, payments } = invoice;
   const sum = payableNow(invoice);
   const open = differences.filter((one) => one.clearance === null).length;
-  const here = (...states: InvoiceDetail['state'][]): Step['state'] => (states.includes(state) ? 'here' : 'later');
+  const here = (...states: InvoiceDetail['state'][]): Step['state'] =>
+    states.includes(state) ? 'here' : 'later';
   const paid = payments.find((payment) => payment.state === 'succeeded');
-  const clear: Step = { key: 'clear', says: clearWords(differences.length, open), who: 'office', state: open === 0 ? 'done' : here('to_clear') };
-  const first: Step = { key: 'approve', says: `Approve ${amountText(sum)}`, who: approved ? `${approved.by}, ${at(approved.at)}` : 'office', state: approved ? 'done' : here('to_approve') };
+  const clear: Step = {
+    key: 'clear',
+    says: clearWords(differences.length, open),
+    who: 'office',
+    state: open === 0 ? 'done' : here('to_clear'),
+  };
+  const first: Step = {
+    key: 'approve',
+    says: `Approve ${amountText(sum)}`,
+    who: approved ? `${approved.by}, ${at(approved.at)}` : 'office',
+    state: approved ? 'done' : here('to_approve'),
+  };
   const second: Step = {
     key: 'second',
     says: 'Approve a second time',
-    who: secondApproved ? `${secondApproved.by}, ${at(secondApproved.at)}` : `an admin, another person: over ${amountText(above ?? 0)} two people`,
+    who: secondApproved
+      ? `${secondApproved.by}, ${at(secondApproved.at)}`
+      : `an admin, another person: over ${amountText(above ?? 0)} two people`,
     state: secondApproved ? 'done' : here('second_approval'),
   };
-  const pay: Step = { key: 'pay', says: 'Pay and send the remittance', who: paid?.endedAt ? `${paid.by}, ${at(paid.endedAt)}` : 'from the saved method, once and only once', state: state === 'paid' ? 'done' : here('to_pay', 'paying', 'payment_failed') };
+  const pay: Step = {
+    key: 'pay',
+    says: 'Pay and send the remittance',
+    who: paid?.endedAt ? `${paid.by}, ${at(paid.endedAt)}` : 'from the saved method, once and only once',
+    state: state === 'paid' ? 'done' : here('to_pay', 'paying', 'payment_failed'),
+  };
   return [clear, first, ...(above !== null && sum > above ? [second] : []), pay];
 }
 
 function clearWords(all: number, open: number): string {
   if (all === 0) return 'No difference to clear';
-  return open === 0 ? `${all} ${all === 1 ? 'difference' : 'differences'} cleared` : `Clear ${open} ${open === 1 ? 'difference' : 'differences'}`;
+  return open === 0
+    ? `${all} ${all === 1 ? 'difference' : 'differences'} cleared`
+    : `Clear ${open} ${open === 1 ? 'difference' : 'differences'}`;
 }

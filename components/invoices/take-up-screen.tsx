@@ -18,7 +18,10 @@ export function TakeUpScreen() {
   const hits = (data?.hits ?? []).filter((hit) => hit.kind === 'Batch' || hit.kind === 'Order');
   return (
     <>
-      <PageHead title="Take up an invoice" sub="One that came on paper or by mail. What comes through the processor’s page is here already." />
+      <PageHead
+        title="Take up an invoice"
+        sub="One that came on paper or by mail. What comes through the processor’s page is here already."
+      />
       <div className="max-w-xl border-t-heavy border-ink pt-3">
         {batch ? (
           <p>
@@ -28,13 +31,27 @@ export function TakeUpScreen() {
             </Button>
           </p>
         ) : (
-          <TextField label="Order or batch it names" mono autoFocus value={typed} onChange={(event) => setTyped(event.currentTarget.value)} hint={text.length >= 2 && data && hits.length === 0 ? `No order or batch begins with ${text}.` : 'as printed on the invoice'} />
+          <TextField
+            label="Order or batch it names"
+            mono
+            autoFocus
+            value={typed}
+            onChange={(event) => setTyped(event.currentTarget.value)}
+            hint={
+              text.length >= 2 && data && hits.length === 0
+                ? `No order or batch begins with ${text}.`
+                : 'as printed on the invoice'
+            }
+          />
         )}
         {!batch && hits.length > 0 && (
           <ul aria-label="Batches found" className="pt-1">
             {hits.map((hit) => (
               <li key={`${hit.kind} ${hit.number}`} className="border-b border-rule py-2">
-                <Button look="word" onClick={() => setBatch({ id: hit.href.split('/').at(-1) ?? '', number: hit.number })}>
+                <Button
+                  look="word"
+                  onClick={() => setBatch({ id: hit.href.split('/').at(-1) ?? '', number: hit.number })}
+                >
                   {hit.number}
                 </Button>{' '}
                 <span className="text-quiet">

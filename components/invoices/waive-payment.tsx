@@ -19,14 +19,21 @@ export function WaivePayment({ batchId }: { batchId: string }) {
   const [error, setError] = useState<string>();
   const { data: gate } = useLazyRead(getGate, { batchId }, { enabled: mayWaive });
   const write = useWrite(waivePayment, { refreshes: [getGate, listInvoices, listAudit] });
-  const isUnpaid = gate?.lines.some((line) => line.missing.some((one) => one.reason === 'not_paid' && one.detail.includes(gate.number)));
+  const isUnpaid = gate?.lines.some((line) =>
+    line.missing.some((one) => one.reason === 'not_paid' && one.detail.includes(gate.number)),
+  );
   if (!mayWaive || !isUnpaid) return null;
   const waive = async () => {
     if (reason.trim().length < 5) return setError('Give the reason in a few words.');
-    const done = await write.mutateAsync({ batchId, reason }).catch((problem: unknown) => setError(problem instanceof Error ? problem.message : 'Not waived.'));
+    const done = await write
+      .mutateAsync({ batchId, reason })
+      .catch((problem: unknown) => setError(problem instanceof Error ? problem.message : 'Not waived.'));
     if (!done) return;
     setOpen(false);
-    showMessage({ says: `${gate?.number} may pass without payment.`, action: { says: 'Release', href: `/batches/${batchId}/release` } });
+    showMessage({
+      says: `${gate?.number} may pass without payment.`,
+      action: { says: 'Release', href: `/batches/${batchId}/release` },
+    });
   };
   return (
     <div className="pt-1">
@@ -49,7 +56,13 @@ export function WaivePayment({ batchId }: { batchId: string }) {
           </>
         }
       >
-        <TextArea label="Reason" maxLength={500} value={reason} error={error} onChange={(event) => setReason(event.currentTarget.value)} />
+        <TextArea
+          label="Reason"
+          maxLength={500}
+          value={reason}
+          error={error}
+          onChange={(event) => setReason(event.currentTarget.value)}
+        />
       </Dialog>
     </div>
   );

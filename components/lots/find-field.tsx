@@ -33,8 +33,22 @@ export function FindField({ label, text, hint }: FindFieldProps) {
   };
 
   return (
-    <form role="search" aria-busy={isPending} onSubmit={(event) => event.preventDefault()} className="w-72 max-md:w-full">
-      <TextField label={label} name="text" type="search" autoComplete="off" mono defaultValue={text} hint={hint} onChange={(event) => find(event.currentTarget.value)} />
+    <form
+      role="search"
+      aria-busy={isPending}
+      onSubmit={(event) => event.preventDefault()}
+      className="w-72 max-md:w-full"
+    >
+      <TextField
+        label={label}
+        name="text"
+        type="search"
+        autoComplete="off"
+        mono
+        defaultValue={text}
+        hint={hint}
+        onChange={(event) => find(event.currentTarget.value)}
+      />
     </form>
   );
 }

@@ -46,16 +46,31 @@ export function ImportScreen() {
 
   return (
     <>
-      <PageHead title="Import lots" sub="From a spreadsheet saved as CSV. You see every row first; nothing is imported until all are right." />
+      <PageHead
+        title="Import lots"
+        sub="From a spreadsheet saved as CSV. You see every row first; nothing is imported until all are right."
+      />
       <div className="grid grid-cols-[minmax(0,2fr)_minmax(0,1fr)] gap-9 max-md:grid-cols-1 max-md:gap-4">
-        <FileDrop label={preview ? 'Choose the file again, or another' : 'CSV file of lots'} accept=".csv,.tsv,.txt,text/csv" onFiles={(files) => void read(files)} error={fault} hint="comma, semicolon or tab between the cells; at most 1,000 rows" />
+        <FileDrop
+          label={preview ? 'Choose the file again, or another' : 'CSV file of lots'}
+          accept=".csv,.tsv,.txt,text/csv"
+          onFiles={(files) => void read(files)}
+          error={fault}
+          hint="comma, semicolon or tab between the cells; at most 1,000 rows"
+        />
         <div className="pt-[21px] max-md:pt-0">
           <Button onClick={saveTemplate}>Save an empty file to fill in</Button>
         </div>
       </div>
       {check.isPending && <Loading label="Looking through the file" />}
       {!preview && !check.isPending && <ColumnsOfFile />}
-      {preview && <PreviewOfImport key={preview.name} preview={preview} onChanged={(checked) => setPreview({ ...preview, checked })} />}
+      {preview && (
+        <PreviewOfImport
+          key={preview.name}
+          preview={preview}
+          onChanged={(checked) => setPreview({ ...preview, checked })}
+        />
+      )}
     </>
   );
 }
@@ -63,7 +78,10 @@ export function ImportScreen() {
 function ColumnsOfFile() {
   return (
     <Section title="What the file has" note="the first line names the columns, in any order" className="mt-6">
-      <Table label="Columns of the file" columns={[{ says: 'Column' }, { says: 'Example' }, { says: 'What it is' }]}>
+      <Table
+        label="Columns of the file"
+        columns={[{ says: 'Column' }, { says: 'Example' }, { says: 'What it is' }]}
+      >
         {IMPORT_COLUMNS.map((column) => (
           <Row key={column.key}>
             <Cell strong>{column.head}</Cell>
@@ -81,7 +99,13 @@ function ColumnsOfFile() {
   );
 }
 
-function PreviewOfImport({ preview, onChanged }: { preview: Preview; onChanged: (checked: Preview['checked']) => void }) {
+function PreviewOfImport({
+  preview,
+  onChanged,
+}: {
+  preview: Preview;
+  onChanged: (checked: Preview['checked']) => void;
+}) {
   const router = useRouter();
   const { rows, checked, ignored, name } = preview;
   const run = useWrite(importLots, { refreshes: [listLots] });
@@ -95,11 +119,14 @@ function PreviewOfImport({ preview, onChanged }: { preview: Preview; onChanged: 
         { rows },
         {
           onSuccess: ({ lots }) => {
-            showMessage({ says: `${count(lots.length, 'lot')} imported, ${pieces.toLocaleString('en-US')} pc.` });
+            showMessage({
+              says: `${count(lots.length, 'lot')} imported, ${pieces.toLocaleString('en-US')} pc.`,
+            });
             router.push('/lots');
           },
           // Something was added by another meanwhile: the rows say what.
-          onError: (error) => void (error.problem.fields && check.mutateAsync({ rows }).then(onChanged, () => undefined)),
+          onError: (error) =>
+            void (error.problem.fields && check.mutateAsync({ rows }).then(onChanged, () => undefined)),
         },
       )
       .catch(() => undefined);
@@ -118,13 +145,22 @@ function PreviewOfImport({ preview, onChanged }: { preview: Preview; onChanged: 
       {run.error && <Failing says={run.error.problem.title} />}
       <ImportTable rows={rows} checked={checked} />
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2 pt-4">
-        <Button look="primary" onClick={start} busyLabel="Importing" notNow={wrong > 0 && `${wrong === 1 ? '1 row is' : `${wrong} rows are`} wrong. Put them right in the file and choose it again.`}>
+        <Button
+          look="primary"
+          onClick={start}
+          busyLabel="Importing"
+          notNow={
+            wrong > 0 &&
+            `${wrong === 1 ? '1 row is' : `${wrong} rows are`} wrong. Put them right in the file and choose it again.`
+          }
+        >
           Import {count(rows.length, 'lot')}
         </Button>
         <ButtonLink href="/lots">Leave without importing</ButtonLink>
         {wrong === 0 && (
           <span className="text-second text-quiet">
-            All rows are right: <span className="num">{pieces.toLocaleString('en-US')}</span> pc will wait for their first step.
+            All rows are right: <span className="num">{pieces.toLocaleString('en-US')}</span> pc will wait for
+            their first step.
           </span>
         )}
       </div>
@@ -132,7 +168,8 @@ function PreviewOfImport({ preview, onChanged }: { preview: Preview; onChanged: 
   );
 }
 
-const count = (many: number, thing: string): string => `${many.toLocaleString('en-US')} ${thing}${many === 1 ? '' : 's'}`;
+const count = (many: number, thing: string): string =>
+  `${many.toLocaleString('en-US')} ${thing}${many === 1 ? '' : 's'}`;
 
 function saveTemplate(): void {
   const url = URL.createObjectURL(new Blob([importTemplate()], { type: 'text/csv' }));

@@ -15,7 +15,15 @@ interface ImportTableProps {
 
 type CheckedRow = ImportTableProps['checked']['rows'][number];
 
-const COLUMNS = [{ says: 'Row', right: true }, { says: 'Part' }, { says: 'Heat' }, { says: 'Pieces', right: true }, { says: 'Lot' }, { says: 'Made on' }, { says: 'What is wrong' }];
+const COLUMNS = [
+  { says: 'Row', right: true },
+  { says: 'Part' },
+  { says: 'Heat' },
+  { says: 'Pieces', right: true },
+  { says: 'Lot' },
+  { says: 'Made on' },
+  { says: 'What is wrong' },
+];
 const SHOWN_AT_ONCE = 200;
 
 /** Every row as it was read, with what is wrong beside the cell that is. */
@@ -23,13 +31,27 @@ export function ImportTable({ rows, checked }: ImportTableProps) {
   const wrong = checked.rows.filter(({ problems }) => problems.length > 0).length;
   const [onlyWrong, setOnlyWrong] = useState(false);
   const [shown, setShown] = useState(SHOWN_AT_ONCE);
-  const numbered = rows.map((row, at) => ({ row, number: at + 1, checked: checked.rows[at] ?? { problems: [], part: null } }));
+  const numbered = rows.map((row, at) => ({
+    row,
+    number: at + 1,
+    checked: checked.rows[at] ?? { problems: [], part: null },
+  }));
   const listed = onlyWrong ? numbered.filter(({ checked: { problems } }) => problems.length > 0) : numbered;
   return (
     <>
       <div className="flex flex-wrap items-center gap-x-6" role="status">
-        <strong className={wrong > 0 ? 'text-held-ink' : 'text-proved-ink'}>{wrong === 0 ? 'Nothing is wrong.' : `${wrong} of ${rows.length} rows ${wrong === 1 ? 'is' : 'are'} wrong.`}</strong>
-        {wrong > 0 && wrong < rows.length && <Checkbox says="Show only those" checked={onlyWrong} onChange={(event) => setOnlyWrong(event.currentTarget.checked)} />}
+        <strong className={wrong > 0 ? 'text-held-ink' : 'text-proved-ink'}>
+          {wrong === 0
+            ? 'Nothing is wrong.'
+            : `${wrong} of ${rows.length} rows ${wrong === 1 ? 'is' : 'are'} wrong.`}
+        </strong>
+        {wrong > 0 && wrong < rows.length && (
+          <Checkbox
+            says="Show only those"
+            checked={onlyWrong}
+            onChange={(event) => setOnlyWrong(event.currentTarget.checked)}
+          />
+        )}
       </div>
       <Table label="Rows of the file" columns={COLUMNS} dense>
         {listed.slice(0, shown).map((line) => (
@@ -45,7 +67,15 @@ export function ImportTable({ rows, checked }: ImportTableProps) {
   );
 }
 
-function ImportLine({ row, number, checked: { problems, part } }: { row: RawRow; number: number; checked: CheckedRow }) {
+function ImportLine({
+  row,
+  number,
+  checked: { problems, part },
+}: {
+  row: RawRow;
+  number: number;
+  checked: CheckedRow;
+}) {
   const isWrong = (field: string) => problems.some((problem) => problem.field === field);
   const mark = (field: string) => (isWrong(field) ? 'text-held-ink font-semibold' : '');
   const pieces = piecesIn(row);
@@ -55,7 +85,9 @@ function ImportLine({ row, number, checked: { problems, part } }: { row: RawRow;
         {number}
       </Cell>
       <Cell className={`[overflow-wrap:anywhere] ${mark('part')} ${mark('revision')}`}>
-        <span className="num">{row.part}</span> {(part?.revision ?? row.revision) && <span>rev {part?.revision ?? row.revision}</span>} <span className="font-normal text-quiet">{part?.name}</span>
+        <span className="num">{row.part}</span>{' '}
+        {(part?.revision ?? row.revision) && <span>rev {part?.revision ?? row.revision}</span>}{' '}
+        <span className="font-normal text-quiet">{part?.name}</span>
       </Cell>
       <Cell code head="Heat" className={mark('heat')}>
         {row.heat}

@@ -11,12 +11,21 @@ import { Cell, Row, Table } from '@/components/ui/table';
 import { listMovements, type MovementRow } from '@/lib/lots/contract';
 import { spotWords } from './place-words';
 
-const COLUMNS = [{ says: 'When' }, { says: 'Who' }, { says: 'Pieces', right: true }, { says: 'From' }, { says: 'To' }, { says: 'Why' }];
+const COLUMNS = [
+  { says: 'When' },
+  { says: 'Who' },
+  { says: 'Pieces', right: true },
+  { says: 'From' },
+  { says: 'To' },
+  { says: 'Why' },
+];
 
 /** Every movement of the lot's pieces: what the picture above is the sum of. */
 export function Ledger({ lotId, made }: { lotId: string; made: number }) {
   const clock = useClock();
-  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listMovements, { lotId });
+  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listMovements, {
+    lotId,
+  });
   const rows = data?.pages.flatMap((page) => page.rows) ?? [];
   return (
     <Section title="Ledger" note="newest first; rows are only ever added">
@@ -33,7 +42,9 @@ export function Ledger({ lotId, made }: { lotId: string; made: number }) {
               <Cell figure head="Pieces">
                 {row.pieces.toLocaleString('en-US')}
               </Cell>
-              <Cell head="From">{row.from === null ? <span className="text-quiet">made</span> : spotWords(row.from)}</Cell>
+              <Cell head="From">
+                {row.from === null ? <span className="text-quiet">made</span> : spotWords(row.from)}
+              </Cell>
               <Cell head="To">{spotWords(row.to)}</Cell>
               <Cell head="Why" className="break-words">
                 <Why row={row} made={made} />
@@ -44,7 +55,12 @@ export function Ledger({ lotId, made }: { lotId: string; made: number }) {
       )}
       {hasNextPage && (
         <div className="pt-3">
-          <Button size="small" busy={isFetchingNextPage} busyLabel="Reading further back" onClick={() => fetchNextPage().then(() => undefined)}>
+          <Button
+            size="small"
+            busy={isFetchingNextPage}
+            busyLabel="Reading further back"
+            onClick={() => fetchNextPage().then(() => undefined)}
+          >
             Further back
           </Button>
         </div>
@@ -59,7 +75,9 @@ function Why({ row, made }: { row: MovementRow; made: number }) {
     <>
       {row.reason.replaceAll('_', ' ')}
       {row.note && <span className="text-quiet">, {row.note}</span>}
-      {row.serials.length > 0 && row.serials.length < made && <span className="num block text-source text-quiet">{row.serials.join(', ')}</span>}
+      {row.serials.length > 0 && row.serials.length < made && (
+        <span className="num block text-source text-quiet">{row.serials.join(', ')}</span>
+      )}
     </>
   );
 }

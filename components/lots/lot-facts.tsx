@@ -56,13 +56,27 @@ export function LotFacts({ lot, mayEdit }: { lot: Lot; mayEdit: boolean }) {
 const Facts = editLot.input.pick({ heat: true, note: true });
 
 function FactsForm({ lot, onDone }: { lot: Lot; onDone: () => void }) {
-  const form = useForm({ resolver: zodResolver(Facts), defaultValues: { heat: lot.heat, note: lot.note ?? '' } });
+  const form = useForm({
+    resolver: zodResolver(Facts),
+    defaultValues: { heat: lot.heat, note: lot.note ?? '' },
+  });
   const write = useWrite(editLot, { refreshes: [getLot, listLots] });
   const { errors } = form.formState;
   const save = form.handleSubmit((values) =>
     write
-      .mutateAsync({ lotId: lot.id, version: lot.version, millCertificateFileId: lot.millCertificate?.id ?? null, ...values }, { onSuccess: onDone, onError: showOnForm(form) })
-      .then(() => undefined, () => undefined),
+      .mutateAsync(
+        {
+          lotId: lot.id,
+          version: lot.version,
+          millCertificateFileId: lot.millCertificate?.id ?? null,
+          ...values,
+        },
+        { onSuccess: onDone, onError: showOnForm(form) },
+      )
+      .then(
+        () => undefined,
+        () => undefined,
+      ),
   );
   return (
     <form noValidate onSubmit={save} className="flex flex-col gap-3 py-2">

@@ -29,7 +29,11 @@ export function LotScreen({ lotId }: { lotId: string }) {
   const mayRead = useMay('dossier.read');
   return (
     <>
-      <PageHead title={<span className="num text-thing">{lot.number}</span>} cells={<TitleCells cells={headCells(lot)} />} actions={mayRead && <ButtonLink href={`/lots/${lot.id}/dossier`}>Dossier</ButtonLink>} />
+      <PageHead
+        title={<span className="num text-thing">{lot.number}</span>}
+        cells={<TitleCells cells={headCells(lot)} />}
+        actions={mayRead && <ButtonLink href={`/lots/${lot.id}/dossier`}>Dossier</ButtonLink>}
+      />
       <MainAndSide
         main={
           <>
@@ -75,28 +79,48 @@ function headCells(lot: Lot) {
   ];
 }
 
-const BATCH_COLUMNS = [{ says: 'Batch' }, { says: 'For' }, { says: 'To' }, { says: 'Pieces', right: true }, { says: 'Dispatched' }, { says: 'Promised' }];
+const BATCH_COLUMNS = [
+  { says: 'Batch' },
+  { says: 'For' },
+  { says: 'To' },
+  { says: 'Pieces', right: true },
+  { says: 'Dispatched' },
+  { says: 'Promised' },
+];
 
 function BatchesOfLot({ lot }: { lot: Lot }) {
   const clock = useClock();
   return (
     <Section title="Batches it went on" note={lot.batches.length > 0 ? 'newest first' : undefined}>
       {lot.batches.length === 0 ? (
-        <Empty says="It has not gone out yet." comes="Its pieces can ride along on any batch for the step they wait for." action={<Link href="/batches">To the batches</Link>} />
+        <Empty
+          says="It has not gone out yet."
+          comes="Its pieces can ride along on any batch for the step they wait for."
+          action={<Link href="/batches">To the batches</Link>}
+        />
       ) : (
         <Table label="Batches" columns={BATCH_COLUMNS}>
           {lot.batches.map((batch) => (
             <Row key={batch.id}>
               <Cell>
-                <BatchTag stage={batch.stage} number={batch.number} href={`/batches/${batch.id}`} size="row" />
+                <BatchTag
+                  stage={batch.stage}
+                  number={batch.number}
+                  href={`/batches/${batch.id}`}
+                  size="row"
+                />
               </Cell>
               <Cell head="For">{PROCESS_WORDS[batch.process]}</Cell>
               <Cell head="To">{batch.processor}</Cell>
               <Cell figure head="Pieces">
                 {batch.pieces.toLocaleString('en-US')}
               </Cell>
-              <Cell head="Dispatched">{batch.dispatchedAt && <Moment at={new Date(batch.dispatchedAt)} clock={clock} />}</Cell>
-              <Cell head="Promised">{batch.promisedOn && <Day day={batch.promisedOn} clock={clock} short />}</Cell>
+              <Cell head="Dispatched">
+                {batch.dispatchedAt && <Moment at={new Date(batch.dispatchedAt)} clock={clock} />}
+              </Cell>
+              <Cell head="Promised">
+                {batch.promisedOn && <Day day={batch.promisedOn} clock={clock} short />}
+              </Cell>
             </Row>
           ))}
         </Table>
@@ -110,13 +134,16 @@ function RouteOfLot({ lot }: { lot: Lot }) {
     <Section title="Its way outside" note={lot.route.length === 1 ? '1 step' : `${lot.route.length} steps`}>
       <ol>
         {lot.route.map((step) => {
-          const waiting = lot.whereabouts.filter(({ place, holder }) => place === 'making' && holder?.id === step.id).reduce((sum, { pieces }) => sum + pieces, 0);
+          const waiting = lot.whereabouts
+            .filter(({ place, holder }) => place === 'making' && holder?.id === step.id)
+            .reduce((sum, { pieces }) => sum + pieces, 0);
           return (
             <li key={step.id} className="flex items-baseline gap-3 border-b border-rule py-2">
               <span className="num w-4 text-quiet">{step.seq}</span>
               <span className="min-w-0 flex-1">
-                <strong>{PROCESS_WORDS[step.process]}</strong> {step.targetCondition && <span className="num">to {step.targetCondition}</span>}
-                <span className="block text-second text-quiet [overflow-wrap:anywhere]">
+                <strong>{PROCESS_WORDS[step.process]}</strong>{' '}
+                {step.targetCondition && <span className="num">to {step.targetCondition}</span>}
+                <span className="block text-second [overflow-wrap:anywhere] text-quiet">
                   {step.specification} {step.specificationRevision}
                 </span>
               </span>

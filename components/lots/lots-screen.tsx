@@ -24,18 +24,38 @@ export interface LotFilter {
   partId?: string;
 }
 
-const WHERE_WORDS: Record<Whereabouts, string> = { waiting: 'Waiting', away: 'Away', care: 'Back, not in stock', stock: 'In stock' };
-const COLUMNS = [{ says: 'Lot' }, { says: 'Part' }, { says: 'Alloy' }, { says: 'Heat' }, { says: 'Made' }, { says: 'Pieces', right: true }, { says: 'Where they are' }, { says: 'Waits for' }];
+const WHERE_WORDS: Record<Whereabouts, string> = {
+  waiting: 'Waiting',
+  away: 'Away',
+  care: 'Back, not in stock',
+  stock: 'In stock',
+};
+const COLUMNS = [
+  { says: 'Lot' },
+  { says: 'Part' },
+  { says: 'Alloy' },
+  { says: 'Heat' },
+  { says: 'Made' },
+  { says: 'Pieces', right: true },
+  { says: 'Where they are' },
+  { says: 'Waits for' },
+];
 
 /** Every lot, newest first, with where its pieces are. */
 export function LotsScreen({ filter }: { filter: LotFilter }) {
-  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listLots, { ...filter });
+  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listLots, {
+    ...filter,
+  });
   const may = useMay('lot.create');
   const rows = data?.pages.flatMap((page) => page.rows) ?? [];
   const isFiltered = Object.keys(filter).length > 0;
   return (
     <>
-      <PageHead title="Lots" cells={<KindsSegments current="lots" />} actions={may && <Actions partId={filter.partId} />} />
+      <PageHead
+        title="Lots"
+        cells={<KindsSegments current="lots" />}
+        actions={may && <Actions partId={filter.partId} />}
+      />
       <div className="flex flex-wrap items-end gap-x-6 gap-y-3 pb-3">
         <FindField key={filter.partId ?? ''} label="Find a lot, part or heat" text={filter.text ?? ''} />
         <Segments label="Where the pieces are" items={whereItems(filter)} />
@@ -59,7 +79,11 @@ function Actions({ partId }: { partId: string | undefined }) {
   return (
     <>
       <ButtonLink href="/lots/import">Import lots</ButtonLink>
-      <ButtonLink look="primary" href={partId === undefined ? '/lots/new' : `/lots/new?part=${partId}`} shortcut="A">
+      <ButtonLink
+        look="primary"
+        href={partId === undefined ? '/lots/new' : `/lots/new?part=${partId}`}
+        shortcut="A"
+      >
         Add a lot
       </ButtonLink>
     </>
@@ -67,8 +91,21 @@ function Actions({ partId }: { partId: string | undefined }) {
 }
 
 function NoLots({ isFiltered, may }: { isFiltered: boolean; may: boolean }) {
-  if (isFiltered) return <Empty says="No lot is like that." comes="Look at the number again, or at all lots." action={<Link href="/lots">Show all lots</Link>} />;
-  return <Empty says="There are no lots yet." comes="A lot is pieces of one part, made together from one heat." action={may && <Link href="/lots/new">Add a lot</Link>} />;
+  if (isFiltered)
+    return (
+      <Empty
+        says="No lot is like that."
+        comes="Look at the number again, or at all lots."
+        action={<Link href="/lots">Show all lots</Link>}
+      />
+    );
+  return (
+    <Empty
+      says="There are no lots yet."
+      comes="A lot is pieces of one part, made together from one heat."
+      action={may && <Link href="/lots/new">Add a lot</Link>}
+    />
+  );
 }
 
 function LotLine({ row }: { row: LotRow }) {
@@ -79,13 +116,16 @@ function LotLine({ row }: { row: LotRow }) {
         <Link href={`/lots/${row.id}`} className="num font-semibold">
           {row.number}
         </Link>
-        {!row.hasMillCertificate && <span className="block text-source text-dispatched-ink">no mill certificate</span>}
+        {!row.hasMillCertificate && (
+          <span className="block text-source text-dispatched-ink">no mill certificate</span>
+        )}
       </Cell>
       <Cell className="max-w-96">
         <Link href={`/parts/${row.part.id}`} className="num font-semibold [overflow-wrap:anywhere]">
           {row.part.number}
         </Link>{' '}
-        <span className="whitespace-nowrap text-quiet">rev {row.part.revision}</span> <span className="font-cond">{row.part.name}</span>
+        <span className="whitespace-nowrap text-quiet">rev {row.part.revision}</span>{' '}
+        <span className="font-cond">{row.part.name}</span>
       </Cell>
       <Cell head="Alloy">{row.alloy}</Cell>
       <Cell code head="Heat" className="[overflow-wrap:anywhere]">
@@ -107,9 +147,20 @@ function LotLine({ row }: { row: LotRow }) {
 
 function whereItems(filter: LotFilter) {
   const hrefFor = (where: Whereabouts | undefined) => {
-    const query = new URLSearchParams({ ...(filter.text ? { text: filter.text } : {}), ...(filter.partId ? { partId: filter.partId } : {}), ...(where ? { where } : {}) });
+    const query = new URLSearchParams({
+      ...(filter.text ? { text: filter.text } : {}),
+      ...(filter.partId ? { partId: filter.partId } : {}),
+      ...(where ? { where } : {}),
+    });
     return query.size > 0 ? `/lots?${query.toString()}` : '/lots';
   };
-  const item = (where: Whereabouts | undefined, says: string) => ({ says, href: hrefFor(where), current: filter.where === where });
-  return [item(undefined, 'All'), ...(Object.keys(WHERE_WORDS) as Whereabouts[]).map((where) => item(where, WHERE_WORDS[where]))];
+  const item = (where: Whereabouts | undefined, says: string) => ({
+    says,
+    href: hrefFor(where),
+    current: filter.where === where,
+  });
+  return [
+    item(undefined, 'All'),
+    ...(Object.keys(WHERE_WORDS) as Whereabouts[]).map((where) => item(where, WHERE_WORDS[where])),
+  ];
 }

@@ -20,7 +20,13 @@ export function MillCertificate({ lot, mayEdit }: { lot: Lot; mayEdit: boolean }
     setRefusal(undefined);
     await edit
       .mutateAsync(
-        { lotId: lot.id, version: lot.version, heat: lot.heat, note: lot.note ?? '', millCertificateFileId: fileId },
+        {
+          lotId: lot.id,
+          version: lot.version,
+          heat: lot.heat,
+          note: lot.note ?? '',
+          millCertificateFileId: fileId,
+        },
         {
           onSuccess: () => {
             setReplacing(false);
@@ -44,9 +50,21 @@ export function MillCertificate({ lot, mayEdit }: { lot: Lot; mayEdit: boolean }
         )
       }
     >
-      {file ? <FileLink file={file} className="block py-2" /> : <p className="py-2 text-dispatched-ink">None yet for heat <span className="num">{lot.heat}</span>.</p>}
+      {file ? (
+        <FileLink file={file} className="block py-2" />
+      ) : (
+        <p className="py-2 text-dispatched-ink">
+          None yet for heat <span className="num">{lot.heat}</span>.
+        </p>
+      )}
       {mayEdit && (!file || replacing) && (
-        <FileUpload purpose="mill_certificate" label={file ? 'A better copy' : 'Add the mill certificate'} hint="PDF, PNG, JPEG or TIFF, at most 50 MB" onArrived={(arrived) => void take(arrived.id, arrived.name)} error={refusal} />
+        <FileUpload
+          purpose="mill_certificate"
+          label={file ? 'A better copy' : 'Add the mill certificate'}
+          hint="PDF, PNG, JPEG or TIFF, at most 50 MB"
+          onArrived={(arrived) => void take(arrived.id, arrived.name)}
+          error={refusal}
+        />
       )}
     </Section>
   );

@@ -16,18 +16,23 @@ export function NamedPieces({ lot }: { lot: Lot }) {
   return (
     <Section title="Named pieces" note={`${lot.named.length.toLocaleString('en-US')} serials`}>
       <dl>
-        {[...groups].sort(([, a], [, b]) => a.order - b.order).map(([words, { serials }]) => (
-          <div key={words} className="grid grid-cols-[minmax(9rem,17rem)_minmax(0,1fr)] gap-x-4 border-b border-rule py-2 max-sm:grid-cols-1">
-            <dt className="font-cond text-word">{words}</dt>
-            <dd className="flex flex-wrap gap-x-4 gap-y-0.5">
-              {serials.map((serial) => (
-                <span key={serial} className="num">
-                  {serial}
-                </span>
-              ))}
-            </dd>
-          </div>
-        ))}
+        {[...groups]
+          .sort(([, a], [, b]) => a.order - b.order)
+          .map(([words, { serials }]) => (
+            <div
+              key={words}
+              className="grid grid-cols-[minmax(9rem,17rem)_minmax(0,1fr)] gap-x-4 border-b border-rule py-2 max-sm:grid-cols-1"
+            >
+              <dt className="font-cond text-word">{words}</dt>
+              <dd className="flex flex-wrap gap-x-4 gap-y-0.5">
+                {serials.map((serial) => (
+                  <span key={serial} className="num">
+                    {serial}
+                  </span>
+                ))}
+              </dd>
+            </div>
+          ))}
       </dl>
     </Section>
   );

@@ -48,7 +48,18 @@ function LotForm({ part, onPick }: { part: PickedPart | null; onPick: (part: Pic
   const router = useRouter();
   const clock = useClock();
   const create = useWrite(createLot, { refreshes: [listLots, getPart] });
-  const form = useForm<Values>({ defaultValues: { partId: '', heat: '', pieces: '', serials: '', madeOn: calendarDay(clock.now, clock.zone), number: '', note: '', millCertificateFileId: null } });
+  const form = useForm<Values>({
+    defaultValues: {
+      partId: '',
+      heat: '',
+      pieces: '',
+      serials: '',
+      madeOn: calendarDay(clock.now, clock.zone),
+      number: '',
+      note: '',
+      millCertificateFileId: null,
+    },
+  });
   const { errors, isSubmitting } = form.formState;
   const serials = serialsIn(useWatch({ control: form.control, name: 'serials' }));
 
@@ -56,18 +67,27 @@ function LotForm({ part, onPick }: { part: PickedPart | null; onPick: (part: Pic
     const input = LotInput.safeParse(inputOf(values, part));
     const uncounted = part !== null && !part.serialised && values.pieces.trim() === '';
     if (!input.success || uncounted) {
-      const wrong = new Map((input.error?.issues ?? []).map(({ path, message }) => [String(path[0]), message]));
+      const wrong = new Map(
+        (input.error?.issues ?? []).map(({ path, message }) => [String(path[0]), message]),
+      );
       if (uncounted) wrong.set('pieces', 'Pieces are missing. Enter how many there are.');
-      [...wrong].forEach(([field, message], at) => form.setError(field as keyof Values, { message }, { shouldFocus: at === 0 }));
+      [...wrong].forEach(([field, message], at) =>
+        form.setError(field as keyof Values, { message }, { shouldFocus: at === 0 }),
+      );
       return;
     }
-    await create.mutateAsync(input.data, {
-      onError: showOnForm(form),
-      onSuccess: (lot) => {
-        showMessage({ says: `${lot.number} added.`, action: { says: 'Add another', href: `/lots/new?part=${input.data.partId}` } });
-        router.push(`/lots/${lot.id}`);
-      },
-    }).catch(() => undefined);
+    await create
+      .mutateAsync(input.data, {
+        onError: showOnForm(form),
+        onSuccess: (lot) => {
+          showMessage({
+            says: `${lot.number} added.`,
+            action: { says: 'Add another', href: `/lots/new?part=${input.data.partId}` },
+          });
+          router.push(`/lots/${lot.id}`);
+        },
+      })
+      .catch(() => undefined);
   });
 
   return (
@@ -77,15 +97,51 @@ function LotForm({ part, onPick }: { part: PickedPart | null; onPick: (part: Pic
         main={
           <Section title="The lot">
             <div className="flex flex-col gap-3 py-2">
-              <PartPicker picked={part} onPick={(chosen) => { form.clearErrors('partId'); onPick(chosen); }} error={errors.partId?.message} />
+              <PartPicker
+                picked={part}
+                onPick={(chosen) => {
+                  form.clearErrors('partId');
+                  onPick(chosen);
+                }}
+                error={errors.partId?.message}
+              />
               <div className="grid grid-cols-4 gap-x-4 gap-y-3 max-md:grid-cols-2">
-                <TextField className="max-md:col-span-2" label="Heat" mono autoComplete="off" hint="from the mill certificate" error={errors.heat?.message} {...form.register('heat')} />
-                {!part?.serialised && <NumberInput label="Pieces" inputMode="numeric" unit="pc" error={errors.pieces?.message} {...form.register('pieces')} />}
+                <TextField
+                  className="max-md:col-span-2"
+                  label="Heat"
+                  mono
+                  autoComplete="off"
+                  hint="from the mill certificate"
+                  error={errors.heat?.message}
+                  {...form.register('heat')}
+                />
+                {!part?.serialised && (
+                  <NumberInput
+                    label="Pieces"
+                    inputMode="numeric"
+                    unit="pc"
+                    error={errors.pieces?.message}
+                    {...form.register('pieces')}
+                  />
+                )}
                 <DateField label="Made" error={errors.madeOn?.message} {...form.register('madeOn')} />
-                <TextField label="Lot number" mono autoComplete="off" hint="empty: the next number" error={errors.number?.message} {...form.register('number')} />
+                <TextField
+                  label="Lot number"
+                  mono
+                  autoComplete="off"
+                  hint="empty: the next number"
+                  error={errors.number?.message}
+                  {...form.register('number')}
+                />
               </div>
               {part?.serialised && (
-                <TextArea label="Serials" rows={8} hint={`one a line, or divided by commas; ${serials.length === 1 ? '1 piece' : `${serials.length} pieces`}`} error={errors.serials?.message} {...form.register('serials')} />
+                <TextArea
+                  label="Serials"
+                  rows={8}
+                  hint={`one a line, or divided by commas; ${serials.length === 1 ? '1 piece' : `${serials.length} pieces`}`}
+                  error={errors.serials?.message}
+                  {...form.register('serials')}
+                />
               )}
               <TextArea label="Note" rows={2} error={errors.note?.message} {...form.register('note')} />
             </div>

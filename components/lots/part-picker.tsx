@@ -7,7 +7,10 @@ import { Field, fieldAttributes } from '@/components/ui/field';
 import { materialWords } from '@/lib/batches/material-words';
 import { listParts, type PartRow } from '@/lib/parts/contract';
 
-export type PickedPart = Pick<PartRow, 'id' | 'number' | 'revision' | 'name' | 'serialised' | 'alloy' | 'form' | 'clad'>;
+export type PickedPart = Pick<
+  PartRow,
+  'id' | 'number' | 'revision' | 'name' | 'serialised' | 'alloy' | 'form' | 'clad'
+>;
 
 interface PartPickerProps {
   picked: PickedPart | null;
@@ -22,7 +25,11 @@ export function PartPicker({ picked, onPick, error }: PartPickerProps) {
   const id = useId();
   const [text, setText] = useState('');
   const [at, setAt] = useState(0);
-  const { data } = useLazyRead(listParts, { text: text.trim(), limit: SHOWN }, { enabled: text.trim() !== '' && picked === null });
+  const { data } = useLazyRead(
+    listParts,
+    { text: text.trim(), limit: SHOWN },
+    { enabled: text.trim() !== '' && picked === null },
+  );
   const found = text.trim() === '' ? [] : (data?.rows ?? []);
   const isOpen = found.length > 0;
   const pick = (part: PickedPart) => {
@@ -50,7 +57,8 @@ export function PartPicker({ picked, onPick, error }: PartPickerProps) {
       <div className="flex flex-wrap items-baseline gap-x-4">
         <span className="font-cond text-word">Part</span>
         <span className="min-w-0 [overflow-wrap:anywhere]">
-          <span className="num font-semibold">{picked.number}</span> rev {picked.revision} {picked.name} <span className="text-quiet">{materialWords(picked)}</span>
+          <span className="num font-semibold">{picked.number}</span> rev {picked.revision} {picked.name}{' '}
+          <span className="text-quiet">{materialWords(picked)}</span>
         </span>
         <Button look="word" aria-label="Choose another part" onClick={() => onPick(null)}>
           Change
@@ -60,7 +68,9 @@ export function PartPicker({ picked, onPick, error }: PartPickerProps) {
     );
   }
   const isNothing = text.trim() !== '' && data?.rows.length === 0;
-  const hint = isNothing ? 'No part is like that. Look at the number again, or add the part first.' : 'its number or a word of its name';
+  const hint = isNothing
+    ? 'No part is like that. Look at the number again, or add the part first.'
+    : 'its number or a word of its name';
   return (
     <div className="relative">
       <Field id={id} label="Part" hint={hint} error={error}>
@@ -81,7 +91,16 @@ export function PartPicker({ picked, onPick, error }: PartPickerProps) {
           className="lw-input lw-input-number"
         />
       </Field>
-      <ul id={`${id}-found`} role="listbox" aria-label="Parts found" className={isOpen ? 'absolute inset-x-0 top-14 z-20 max-h-80 overflow-auto border border-ink bg-paper touch:top-18' : 'hidden'}>
+      <ul
+        id={`${id}-found`}
+        role="listbox"
+        aria-label="Parts found"
+        className={
+          isOpen
+            ? 'absolute inset-x-0 top-14 z-20 max-h-80 overflow-auto border border-ink bg-paper touch:top-18'
+            : 'hidden'
+        }
+      >
         {found.map((part, row) => (
           <li
             key={part.id}

@@ -34,9 +34,16 @@ export const PLACE_STAGES: Record<Place, Stage> = {
 };
 
 /** Along the way that pieces go, whatever order they came in. */
-export const alongTheWay = <Spotted extends { place: Place }>(spots: readonly Spotted[]): Spotted[] => [...spots].sort((a, b) => PLACES.indexOf(a.place) - PLACES.indexOf(b.place));
+export const alongTheWay = <Spotted extends { place: Place }>(spots: readonly Spotted[]): Spotted[] =>
+  [...spots].sort((a, b) => PLACES.indexOf(a.place) - PLACES.indexOf(b.place));
 
-const PAGES: Record<Holder['kind'], string | null> = { step: null, batch: '/batches', nonconformance: '/nonconformances', location: null, assembly: '/assemblies' };
+const PAGES: Record<Holder['kind'], string | null> = {
+  step: null,
+  batch: '/batches',
+  nonconformance: '/nonconformances',
+  location: null,
+  assembly: '/assemblies',
+};
 
 export function holderHref(holder: Holder): string | null {
   const page = PAGES[holder.kind];
@@ -53,5 +60,7 @@ const processWords = (name: string): string => PROCESS_WORDS[name as Process] ??
 /** In a ledger: `waiting for step 1, anodize`, `at processor, B-0404`, `in stock, A-3`. */
 export function spotWords({ place, holder }: Spot): string {
   if (!holder) return PLACE_WORDS[place];
-  return holder.kind === 'step' ? `${PLACE_WORDS[place]} ${holderWords(holder)}` : `${PLACE_WORDS[place]}, ${holderWords(holder)}`;
+  return holder.kind === 'step'
+    ? `${PLACE_WORDS[place]} ${holderWords(holder)}`
+    : `${PLACE_WORDS[place]}, ${holderWords(holder)}`;
 }

@@ -14,7 +14,12 @@ export function PlacesBar({ made, places }: PlacesBarProps) {
     <span className="flex min-w-0 flex-wrap items-center gap-x-3 gap-y-0.5">
       <span aria-hidden="true" className="lw-places h-2.5 w-24 flex-none">
         {way.map(({ place, pieces }) => (
-          <span key={place} className={`lw-place ${STAGE_TONES[PLACE_STAGES[place]]}`} data-place={place} style={{ flexGrow: pieces / Math.max(made, 1) }} />
+          <span
+            key={place}
+            className={`lw-place ${STAGE_TONES[PLACE_STAGES[place]]}`}
+            data-place={place}
+            style={{ flexGrow: pieces / Math.max(made, 1) }}
+          />
         ))}
       </span>
       <span className="text-row">{wayWords(way)}</span>

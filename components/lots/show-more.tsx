@@ -13,9 +13,12 @@ interface ShowMoreProps {
 export function ShowMore({ hasMore, busy, more }: ShowMoreProps) {
   const end = useRef<HTMLDivElement>(null);
   useEffect(() => {
-    const seen = new IntersectionObserver(([entry]) => {
-      if (entry?.isIntersecting && hasMore && !busy) void more();
-    }, { rootMargin: '400px' });
+    const seen = new IntersectionObserver(
+      ([entry]) => {
+        if (entry?.isIntersecting && hasMore && !busy) void more();
+      },
+      { rootMargin: '400px' },
+    );
     if (end.current) seen.observe(end.current);
     return () => seen.disconnect();
   }, [hasMore, busy, more]);
@@ -24,7 +27,12 @@ export function ShowMore({ hasMore, busy, more }: ShowMoreProps) {
     <div ref={end}>
       {hasMore && (
         <div className="pt-3">
-          <Button size="small" busy={busy} busyLabel="Reading on" onClick={() => more().then(() => undefined)}>
+          <Button
+            size="small"
+            busy={busy}
+            busyLabel="Reading on"
+            onClick={() => more().then(() => undefined)}
+          >
             Show more
           </Button>
         </div>

@@ -26,7 +26,9 @@ export function BatchMessages({ batchId, now, mayWrite }: BatchMessagesProps) {
   return (
     <Section id="messages" title="Questions and answers" note={data?.other}>
       {!data && !error && <Loading rows={2} label="Loading what was said" />}
-      {error && !data && <Failing says="What was said is not here just now." again="It is asked for again by itself." />}
+      {error && !data && (
+        <Failing says="What was said is not here just now." again="It is asked for again by itself." />
+      )}
       {data && <Said thread={data} batchId={batchId} now={now} mayWrite={mayWrite} />}
     </Section>
   );
@@ -39,14 +41,44 @@ function Said({ thread, batchId, now, mayWrite }: BatchMessagesProps & { thread:
   const writes = mayWrite && thread.closed === null;
   const send = (kind: 'question' | 'answer' | 'note') =>
     write
-      .mutateAsync({ batchId, kind, body: draft.body, lineId: (!answering && draft.lineId) || null, answersId: kind === 'answer' ? (answering?.id ?? null) : null })
+      .mutateAsync({
+        batchId,
+        kind,
+        body: draft.body,
+        lineId: (!answering && draft.lineId) || null,
+        answersId: kind === 'answer' ? (answering?.id ?? null) : null,
+      })
       .then(() => setDraft(EMPTY_DRAFT))
       // Told beside the field, out of the mutation's own state.
       .catch(() => undefined);
   return (
     <>
-      {thread.messages.length === 0 ? <Empty says="Nothing was said yet." comes={thread.closed ?? `What you write goes to ${thread.other} as a mail and stays with the batch.`} /> : <ThreadList thread={thread} clock={{ zone: thread.zone, now: new Date(now) }} mySide="shop" onAnswer={writes ? answer : undefined} />}
-      {writes && <WriteMessage thread={thread} draft={draft} onDraft={setDraft} answering={answering} onNotAnswering={notAnswering} onSend={send} error={messageError(write.error)} />}
+      {thread.messages.length === 0 ? (
+        <Empty
+          says="Nothing was said yet."
+          comes={
+            thread.closed ?? `What you write goes to ${thread.other} as a mail and stays with the batch.`
+          }
+        />
+      ) : (
+        <ThreadList
+          thread={thread}
+          clock={{ zone: thread.zone, now: new Date(now) }}
+          mySide="shop"
+          onAnswer={writes ? answer : undefined}
+        />
+      )}
+      {writes && (
+        <WriteMessage
+          thread={thread}
+          draft={draft}
+          onDraft={setDraft}
+          answering={answering}
+          onNotAnswering={notAnswering}
+          onSend={send}
+          error={messageError(write.error)}
+        />
+      )}
     </>
   );
 }

@@ -22,9 +22,21 @@ export function ThreadList({ thread: { messages, lines }, clock, mySide, onAnswe
         const line = lines.find((one) => one.id === message.lineId);
         const question = messages.find((one) => one.id === message.answersId);
         return (
-          <MessageItem key={message.id} message={message} waits={open.has(message.id)} mine={message.side === mySide} when={momentWords(new Date(message.createdAt), clock)} about={line && `line ${line.lineNo}, ${line.part}`} question={question}>
+          <MessageItem
+            key={message.id}
+            message={message}
+            waits={open.has(message.id)}
+            mine={message.side === mySide}
+            when={momentWords(new Date(message.createdAt), clock)}
+            about={line && `line ${line.lineNo}, ${line.part}`}
+            question={question}
+          >
             {open.has(message.id) && onAnswer && (
-              <Button look="word" aria-label={`Answer ${message.author}: ${message.body.slice(0, 60)}`} onClick={() => onAnswer(message)}>
+              <Button
+                look="word"
+                aria-label={`Answer ${message.author}: ${message.body.slice(0, 60)}`}
+                onClick={() => onAnswer(message)}
+              >
                 Answer
               </Button>
             )}
@@ -38,10 +50,20 @@ export function ThreadList({ thread: { messages, lines }, clock, mySide, onAnswe
 /** Questions and trouble of the other side that nobody here has answered. */
 export function openQuestions(messages: readonly MessageView[], mySide: MessageSide): MessageView[] {
   const answered = new Set(messages.flatMap((message) => message.answersId ?? []));
-  return messages.filter((message) => message.side !== mySide && (message.kind === 'question' || message.kind === 'trouble') && !answered.has(message.id));
+  return messages.filter(
+    (message) =>
+      message.side !== mySide &&
+      (message.kind === 'question' || message.kind === 'trouble') &&
+      !answered.has(message.id),
+  );
 }
 
-const KIND_WORDS: Record<MessageKind, string> = { question: 'asks', answer: 'answers', note: 'writes', trouble: 'reports trouble' };
+const KIND_WORDS: Record<MessageKind, string> = {
+  question: 'asks',
+  answer: 'answers',
+  note: 'writes',
+  trouble: 'reports trouble',
+};
 
 interface MessageItemProps {
   message: MessageView;
@@ -53,12 +75,22 @@ interface MessageItemProps {
   children: ReactNode;
 }
 
-function MessageItem({ message: { author, kind, body }, waits, mine, when, about, question, children }: MessageItemProps) {
+function MessageItem({
+  message: { author, kind, body },
+  waits,
+  mine,
+  when,
+  about,
+  question,
+  children,
+}: MessageItemProps) {
   return (
     <li className={`border-b border-rule py-2.5 pl-3 [overflow-wrap:anywhere] ${edgeOf(kind, waits, mine)}`}>
       <p className="flex flex-wrap items-baseline gap-x-2 text-second">
         <strong>{author}</strong>
-        <span className={kind === 'trouble' ? 'font-cond text-word text-held-ink' : 'text-quiet'}>{KIND_WORDS[kind]}</span>
+        <span className={kind === 'trouble' ? 'font-cond text-word text-held-ink' : 'text-quiet'}>
+          {KIND_WORDS[kind]}
+        </span>
         {about && <span className="text-quiet">about {about}</span>}
         <span className="ml-auto text-quiet">{when}</span>
       </p>

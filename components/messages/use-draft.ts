@@ -16,9 +16,15 @@ export const EMPTY_DRAFT: Draft = { body: '', lineId: '' };
 export function useAnswering(thread: Thread, mySide: MessageSide) {
   const [chosen, setChosen] = useState<string | 'nothing' | null>(null);
   const open = openQuestions(thread.messages, mySide);
-  const answering: MessageView | null = chosen === 'nothing' ? null : (open.find((one) => one.id === chosen) ?? open.at(-1) ?? null);
-  return { answering, answer: (question: MessageView) => setChosen(question.id), notAnswering: () => setChosen('nothing') };
+  const answering: MessageView | null =
+    chosen === 'nothing' ? null : (open.find((one) => one.id === chosen) ?? open.at(-1) ?? null);
+  return {
+    answering,
+    answer: (question: MessageView) => setChosen(question.id),
+    notAnswering: () => setChosen('nothing'),
+  };
 }
 
 /** The sentence for the field, whichever of its inputs was refused. */
-export const messageError = (error: ApiError | null): string | undefined => (error ? (error.problem.fields?.[0]?.message ?? error.problem.title) : undefined);
+export const messageError = (error: ApiError | null): string | undefined =>
+  error ? (error.problem.fields?.[0]?.message ?? error.problem.title) : undefined;

@@ -25,7 +25,17 @@ interface WriteMessageProps {
 }
 
 /** One field; what one means is which button one presses. */
-export function WriteMessage({ thread, draft, onDraft, answering, onNotAnswering, onSend, error, more, fieldId }: WriteMessageProps) {
+export function WriteMessage({
+  thread,
+  draft,
+  onDraft,
+  answering,
+  onNotAnswering,
+  onSend,
+  error,
+  more,
+  fieldId,
+}: WriteMessageProps) {
   const { lines, other } = thread;
   return (
     <div className="flex flex-col gap-2.5 pt-3">
@@ -37,9 +47,22 @@ export function WriteMessage({ thread, draft, onDraft, answering, onNotAnswering
           </Button>
         </p>
       )}
-      <TextArea {...(fieldId ? { id: fieldId } : {})} label={answering ? 'Your answer' : `Write to ${other}`} rows={3} maxLength={4000} value={draft.body} onChange={(event) => onDraft({ ...draft, body: event.currentTarget.value })} />
+      <TextArea
+        {...(fieldId ? { id: fieldId } : {})}
+        label={answering ? 'Your answer' : `Write to ${other}`}
+        rows={3}
+        maxLength={4000}
+        value={draft.body}
+        onChange={(event) => onDraft({ ...draft, body: event.currentTarget.value })}
+      />
       {!answering && lines.length > 1 && (
-        <SelectField label="About" empty="the whole batch" options={lines.map((line) => ({ value: line.id, says: `line ${line.lineNo}, ${line.part}` }))} value={draft.lineId} onChange={(event) => onDraft({ ...draft, lineId: event.currentTarget.value })} />
+        <SelectField
+          label="About"
+          empty="the whole batch"
+          options={lines.map((line) => ({ value: line.id, says: `line ${line.lineNo}, ${line.part}` }))}
+          value={draft.lineId}
+          onChange={(event) => onDraft({ ...draft, lineId: event.currentTarget.value })}
+        />
       )}
       {error && <FieldError id="message-error" says={error} />}
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2">

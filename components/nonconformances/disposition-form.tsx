@@ -15,7 +15,12 @@ import { list, piecesField } from '@/components/ui/form-fields';
 import { showMessage } from '@/components/ui/message';
 import { PieceCounter } from '@/components/ui/piece-counter';
 import { allowedDispositions, ruleOf } from '@/lib/nonconformances/allowed-dispositions';
-import { disposeNonconformance, getNonconformance, listNonconformances, type NonconformanceDetail } from '@/lib/nonconformances/contract';
+import {
+  disposeNonconformance,
+  getNonconformance,
+  listNonconformances,
+  type NonconformanceDetail,
+} from '@/lib/nonconformances/contract';
 import { DISPOSITIONS, type Disposition } from '@/lib/nonconformances/disposition';
 
 import { buttonWords, choiceOf } from './disposition-words';
@@ -36,34 +41,97 @@ export function DispositionForm({ nonconformance }: { nonconformance: Nonconform
   const left = nonconformance.pieces - nonconformance.decided;
   const [fileId, setFileId] = useState<string | null>(null);
   const [asking, setAsking] = useState<FieldsOut | null>(null);
-  const form = useForm<FieldsIn, unknown, FieldsOut>({ resolver: zodResolver(Fields), defaultValues: { pieces: String(left), reason: '', authority: '', pieceIds: [] } });
+  const form = useForm<FieldsIn, unknown, FieldsOut>({
+    resolver: zodResolver(Fields),
+    defaultValues: { pieces: String(left), reason: '', authority: '', pieceIds: [] },
+  });
   const write = useWrite(disposeNonconformance, { refreshes: [getNonconformance, listNonconformances] });
   const [disposition, pieces] = useWatch({ control: form.control, name: ['disposition', 'pieces'] });
   const rule = ruleOf(kind, disposition);
   const { errors, isSubmitting } = form.formState;
   // What is not a field of this form is said above its button.
-  const elsewhere = errors.root?.message ?? (errors as Record<string, { message?: string } | undefined>)['fileId']?.message;
+  const elsewhere =
+    errors.root?.message ?? (errors as Record<string, { message?: string } | undefined>)['fileId']?.message;
 
   const decide = async (values: FieldsOut) => {
     const pieceIds = serialised && rule?.to !== null ? values.pieceIds : [];
     const done = await write
-      .mutateAsync({ nonconformanceId: id, version, ...values, pieceIds, authority: rule?.authority ? values.authority : '', fileId: rule?.file ? fileId : null }, { onError: showOnForm(form) })
+      .mutateAsync(
+        {
+          nonconformanceId: id,
+          version,
+          ...values,
+          pieceIds,
+          authority: rule?.authority ? values.authority : '',
+          fileId: rule?.file ? fileId : null,
+        },
+        { onError: showOnForm(form) },
+      )
       .catch(() => null);
     setAsking(null);
-    if (done) showMessage({ says: done.closed ? `${nonconformance.number} is closed.` : `Decided about ${values.pieces}, ${done.left} left.` });
+    if (done)
+      showMessage({
+        says: done.closed
+          ? `${nonconformance.number} is closed.`
+          : `Decided about ${values.pieces}, ${done.left} left.`,
+      });
   };
-  const submit = form.handleSubmit((values) => (values.disposition === 'scrap' ? setAsking(values) : decide(values)));
+  const submit = form.handleSubmit((values) =>
+    values.disposition === 'scrap' ? setAsking(values) : decide(values),
+  );
   const words = (count: string) => buttonWords(kind, disposition, count);
 
   return (
-    <form noValidate onSubmit={submit} aria-label="Disposition" className="flex max-w-prose flex-col gap-4 py-2">
-      <RadioGroup label="What becomes of them" error={errors.disposition?.message} options={allowedDispositions(kind).map((value) => ({ value, ...choiceOf(kind, value) }))} {...form.register('disposition')} />
-      <PieceCounter {...form.register('pieces')} className="w-52" label="Pieces" hint={`${left} left to decide`} min={1} max={left} error={errors.pieces?.message} />
+    <form
+      noValidate
+      onSubmit={submit}
+      aria-label="Disposition"
+      className="flex max-w-prose flex-col gap-4 py-2"
+    >
+      <RadioGroup
+        label="What becomes of them"
+        error={errors.disposition?.message}
+        options={allowedDispositions(kind).map((value) => ({ value, ...choiceOf(kind, value) }))}
+        {...form.register('disposition')}
+      />
+      <PieceCounter
+        {...form.register('pieces')}
+        className="w-52"
+        label="Pieces"
+        hint={`${left} left to decide`}
+        min={1}
+        max={left}
+        error={errors.pieces?.message}
+      />
       {serialised && rule?.to != null && (
-        <CheckboxGroup label="Which pieces" error={errors.pieceIds?.message} options={heldPieces.map((piece) => ({ value: piece.id, says: <span className="num">{piece.serial}</span> }))} {...form.register('pieceIds')} />
+        <CheckboxGroup
+          label="Which pieces"
+          error={errors.pieceIds?.message}
+          options={heldPieces.map((piece) => ({
+            value: piece.id,
+            says: <span className="num">{piece.serial}</span>,
+          }))}
+          {...form.register('pieceIds')}
+        />
       )}
-      {rule?.authority && <TextField label="Who allows it, and by which paper" hint="The engineer or the customer, by name and number of the paper" error={errors.authority?.message} {...form.register('authority')} />}
-      {rule?.file && <FileUpload purpose="concession" batchId={nonconformance.batchId} label="The concession" hint="PDF or picture, up to 50 MB" onArrived={(file) => setFileId(file.id)} onRemoved={() => setFileId(null)} />}
+      {rule?.authority && (
+        <TextField
+          label="Who allows it, and by which paper"
+          hint="The engineer or the customer, by name and number of the paper"
+          error={errors.authority?.message}
+          {...form.register('authority')}
+        />
+      )}
+      {rule?.file && (
+        <FileUpload
+          purpose="concession"
+          batchId={nonconformance.batchId}
+          label="The concession"
+          hint="PDF or picture, up to 50 MB"
+          onArrived={(file) => setFileId(file.id)}
+          onRemoved={() => setFileId(null)}
+        />
+      )}
       <TextArea label="Reason" rows={2} error={errors.reason?.message} {...form.register('reason')} />
       {elsewhere && (
         <p role="alert" className="font-medium text-held-ink">
@@ -71,7 +139,13 @@ export function DispositionForm({ nonconformance }: { nonconformance: Nonconform
         </p>
       )}
       <span>
-        <Button look="primary" type="submit" busy={isSubmitting || write.isPending} busyLabel="Deciding" notNow={isDisposition(disposition) ? undefined : 'Choose first what becomes of them.'}>
+        <Button
+          look="primary"
+          type="submit"
+          busy={isSubmitting || write.isPending}
+          busyLabel="Deciding"
+          notNow={isDisposition(disposition) ? undefined : 'Choose first what becomes of them.'}
+        >
           {isDisposition(disposition) ? words(String(pieces)) : 'Decide'}
         </Button>
       </span>
@@ -80,10 +154,19 @@ export function DispositionForm({ nonconformance }: { nonconformance: Nonconform
         onClose={() => setAsking(null)}
         busy={write.isPending}
         title={asking ? `${words(String(asking.pieces))}, ${nonconformance.partNumber}` : ''}
-        lead={kind === 'short' ? 'They leave the count as lost. This cannot be taken back.' : 'They leave the count for good. This cannot be taken back.'}
+        lead={
+          kind === 'short'
+            ? 'They leave the count as lost. This cannot be taken back.'
+            : 'They leave the count for good. This cannot be taken back.'
+        }
         actions={
           <>
-            <Button look="stop" busy={write.isPending} busyLabel="Deciding" onClick={() => (asking ? decide(asking) : undefined)}>
+            <Button
+              look="stop"
+              busy={write.isPending}
+              busyLabel="Deciding"
+              onClick={() => (asking ? decide(asking) : undefined)}
+            >
               {asking && words(String(asking.pieces))}
             </Button>
             <Button onClick={() => setAsking(null)}>Leave them on hold</Button>
@@ -95,4 +178,5 @@ export function DispositionForm({ nonconformance }: { nonconformance: Nonconform
 }
 
 /** Nothing is chosen at first, whatever the type of the form says. */
-const isDisposition = (value: Disposition | null | undefined): value is Disposition => value != null && DISPOSITIONS.includes(value);
+const isDisposition = (value: Disposition | null | undefined): value is Disposition =>
+  value != null && DISPOSITIONS.includes(value);

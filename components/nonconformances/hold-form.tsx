@@ -10,10 +10,19 @@ import { Loading } from '@/components/ui/loading';
 import { showMessage } from '@/components/ui/message';
 import { getBatch, getBatchLines } from '@/lib/batches/contract';
 import { getCertificate, listCertificates } from '@/lib/certificates/contract';
-import { getRaisable, listNonconformances, raiseNonconformance, type RaisableLine } from '@/lib/nonconformances/contract';
+import {
+  getRaisable,
+  listNonconformances,
+  raiseNonconformance,
+  type RaisableLine,
+} from '@/lib/nonconformances/contract';
 import { RAISED_KINDS, type RaisedKind } from '@/lib/nonconformances/kind';
 
-const KINDS: Record<RaisedKind, string> = { requirement: 'A requirement is not met', papers: 'The papers do not prove it', damaged: 'Damaged' };
+const KINDS: Record<RaisedKind, string> = {
+  requirement: 'A requirement is not met',
+  papers: 'The papers do not prove it',
+  damaged: 'Damaged',
+};
 
 interface HoldFormProps {
   batchId: string;
@@ -45,17 +54,38 @@ export function HoldForm({ batchId, onlyLineId = null, ...rest }: HoldFormProps)
   return <Holding batchId={batchId} lines={lines} {...rest} />;
 }
 
-function Holding({ batchId, lines, kind: given, what: begun, requirementId = null, certificateId = null, onDone }: Omit<HoldFormProps, 'onlyLineId' | 'requirementId' | 'certificateId'> & { lines: readonly RaisableLine[]; requirementId?: string | null; certificateId?: string | null }) {
+function Holding({
+  batchId,
+  lines,
+  kind: given,
+  what: begun,
+  requirementId = null,
+  certificateId = null,
+  onDone,
+}: Omit<HoldFormProps, 'onlyLineId' | 'requirementId' | 'certificateId'> & {
+  lines: readonly RaisableLine[];
+  requirementId?: string | null;
+  certificateId?: string | null;
+}) {
   const [kind, setKind] = useState<RaisedKind>(given);
   const [what, setWhat] = useState(begun);
-  const [counts, setCounts] = useState<Record<string, string>>(() => Object.fromEntries(lines.map((line) => [line.lineId, line.serialised ? '0' : String(line.inQuarantine)])));
+  const [counts, setCounts] = useState<Record<string, string>>(() =>
+    Object.fromEntries(lines.map((line) => [line.lineId, line.serialised ? '0' : String(line.inQuarantine)])),
+  );
   const [ticked, setTicked] = useState<readonly string[]>([]);
   const [refused, setRefused] = useState('');
-  const write = useWrite(raiseNonconformance, { refreshes: [getCertificate, listCertificates, getRaisable, listNonconformances, getBatch, getBatchLines] });
+  const write = useWrite(raiseNonconformance, {
+    refreshes: [getCertificate, listCertificates, getRaisable, listNonconformances, getBatch, getBatchLines],
+  });
 
-  const countOf = (line: RaisableLine) => (line.serialised ? line.pieces.filter((piece) => ticked.includes(piece.id)).length : readCount(counts[line.lineId] ?? ''));
+  const countOf = (line: RaisableLine) =>
+    line.serialised
+      ? line.pieces.filter((piece) => ticked.includes(piece.id)).length
+      : readCount(counts[line.lineId] ?? '');
   const total = lines.reduce((sum, line) => sum + (countOf(line) ?? 0), 0);
-  const faults = Object.fromEntries(lines.map((line) => [line.lineId, faultOf(countOf(line), line.inQuarantine)]));
+  const faults = Object.fromEntries(
+    lines.map((line) => [line.lineId, faultOf(countOf(line), line.inQuarantine)]),
+  );
 
   const hold = async (event: FormEvent) => {
     event.preventDefault();
@@ -65,21 +95,43 @@ function Holding({ batchId, lines, kind: given, what: begun, requirementId = nul
     const numbers: string[] = [];
     try {
       for (const line of lines.filter((one) => (countOf(one) ?? 0) > 0)) {
-        const pieceIds = line.serialised ? line.pieces.filter((piece) => ticked.includes(piece.id)).map((piece) => piece.id) : [];
-        const { number } = await write.mutateAsync({ batchId, lineId: line.lineId, kind, pieces: countOf(line) ?? 0, what: what.trim(), requirementId, certificateId, pieceIds });
+        const pieceIds = line.serialised
+          ? line.pieces.filter((piece) => ticked.includes(piece.id)).map((piece) => piece.id)
+          : [];
+        const { number } = await write.mutateAsync({
+          batchId,
+          lineId: line.lineId,
+          kind,
+          pieces: countOf(line) ?? 0,
+          what: what.trim(),
+          requirementId,
+          certificateId,
+          pieceIds,
+        });
         numbers.push(number);
       }
-      showMessage({ says: `${total} on hold, ${numbers.join(', ')}.`, action: { says: 'Open the list', href: '/nonconformances' } });
+      showMessage({
+        says: `${total} on hold, ${numbers.join(', ')}.`,
+        action: { says: 'Open the list', href: '/nonconformances' },
+      });
       onDone();
     } catch (error) {
-      const done = numbers.length > 0 ? `${numbers.join(', ')} ${numbers.length === 1 ? 'is' : 'are'} raised; the rest is not. ` : '';
+      const done =
+        numbers.length > 0
+          ? `${numbers.join(', ')} ${numbers.length === 1 ? 'is' : 'are'} raised; the rest is not. `
+          : '';
       setRefused(done + (error instanceof Error ? error.message : 'Not held.'));
     }
   };
 
   return (
     <form noValidate onSubmit={hold} aria-label="Hold pieces" className="flex max-w-prose flex-col gap-3">
-      <SelectField label="Why" value={kind} options={RAISED_KINDS.map((value) => ({ value, says: KINDS[value] }))} onChange={(event) => setKind(event.currentTarget.value as RaisedKind)} />
+      <SelectField
+        label="Why"
+        value={kind}
+        options={RAISED_KINDS.map((value) => ({ value, says: KINDS[value] }))}
+        onChange={(event) => setKind(event.currentTarget.value as RaisedKind)}
+      />
       {lines.map((line) =>
         line.serialised ? (
           <SerialTicks key={line.lineId} line={line} ticked={ticked} onTick={setTicked} />
@@ -96,7 +148,13 @@ function Holding({ batchId, lines, kind: given, what: begun, requirementId = nul
           />
         ),
       )}
-      <TextArea label="What is wrong" rows={2} value={what} maxLength={500} onChange={(event) => setWhat(event.currentTarget.value)} />
+      <TextArea
+        label="What is wrong"
+        rows={2}
+        value={what}
+        maxLength={500}
+        onChange={(event) => setWhat(event.currentTarget.value)}
+      />
       {refused && (
         <p role="alert" className="font-medium text-held-ink">
           {refused}
@@ -112,7 +170,15 @@ function Holding({ batchId, lines, kind: given, what: begun, requirementId = nul
   );
 }
 
-function SerialTicks({ line, ticked, onTick }: { line: RaisableLine; ticked: readonly string[]; onTick: (ids: string[]) => void }) {
+function SerialTicks({
+  line,
+  ticked,
+  onTick,
+}: {
+  line: RaisableLine;
+  ticked: readonly string[];
+  onTick: (ids: string[]) => void;
+}) {
   return (
     <fieldset>
       <legend className="font-cond text-word">
@@ -120,7 +186,16 @@ function SerialTicks({ line, ticked, onTick }: { line: RaisableLine; ticked: rea
       </legend>
       <div className="flex flex-wrap gap-x-5">
         {line.pieces.map((piece) => (
-          <Checkbox key={piece.id} says={<span className="num">{piece.serial}</span>} checked={ticked.includes(piece.id)} onChange={(event) => onTick(event.currentTarget.checked ? [...ticked, piece.id] : ticked.filter((id) => id !== piece.id))} />
+          <Checkbox
+            key={piece.id}
+            says={<span className="num">{piece.serial}</span>}
+            checked={ticked.includes(piece.id)}
+            onChange={(event) =>
+              onTick(
+                event.currentTarget.checked ? [...ticked, piece.id] : ticked.filter((id) => id !== piece.id),
+              )
+            }
+          />
         ))}
       </div>
     </fieldset>

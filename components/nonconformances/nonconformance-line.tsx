@@ -8,10 +8,24 @@ import { BatchTag } from '@/components/ui/tag';
 import type { NonconformanceRow } from '@/lib/nonconformances/contract';
 import { KIND_WORDS } from '@/lib/nonconformances/kind';
 
-export const NONCONFORMANCE_COLUMNS = [{ says: 'Number' }, { says: 'Batch' }, { says: 'Line and part' }, { says: 'Pieces', right: true }, { says: 'Kind' }, { says: 'What' }, { says: 'Since' }];
+export const NONCONFORMANCE_COLUMNS = [
+  { says: 'Number' },
+  { says: 'Batch' },
+  { says: 'Line and part' },
+  { says: 'Pieces', right: true },
+  { says: 'Kind' },
+  { says: 'What' },
+  { says: 'Since' },
+];
 
 /** One nonconformance in a list. On the page of its own batch the tag would only repeat the page. */
-export function NonconformanceLine({ row, ofOneBatch = false }: { row: NonconformanceRow; ofOneBatch?: boolean }) {
+export function NonconformanceLine({
+  row,
+  ofOneBatch = false,
+}: {
+  row: NonconformanceRow;
+  ofOneBatch?: boolean;
+}) {
   const clock = useClock();
   const left = row.pieces - row.decided;
   const isOpen = row.closedAt === null;
@@ -28,7 +42,8 @@ export function NonconformanceLine({ row, ofOneBatch = false }: { row: Nonconfor
         </Cell>
       )}
       <Cell>
-        <span className="num">{row.lineNo}</span> {row.partNumber} <span className="text-quiet">lot {row.lotNumber}</span>
+        <span className="num">{row.lineNo}</span> {row.partNumber}{' '}
+        <span className="text-quiet">lot {row.lotNumber}</span>
       </Cell>
       <Cell figure head="Pieces">
         {isOpen && left < row.pieces ? `${left} of ${row.pieces}` : row.pieces}

@@ -12,7 +12,11 @@ import { MainAndSide, Section } from '@/components/ui/section';
 import { Cell, Row, Table } from '@/components/ui/table';
 import { BatchTag } from '@/components/ui/tag';
 import { TitleCells } from '@/components/ui/title-cells';
-import { getNonconformance, type DispositionRow, type NonconformanceDetail } from '@/lib/nonconformances/contract';
+import {
+  getNonconformance,
+  type DispositionRow,
+  type NonconformanceDetail,
+} from '@/lib/nonconformances/contract';
 import { KIND_WORDS } from '@/lib/nonconformances/kind';
 
 import { doneWords } from './disposition-words';
@@ -24,26 +28,53 @@ export function NonconformanceScreen({ nonconformanceId }: { nonconformanceId: s
   const { data } = useRead(getNonconformance, { nonconformanceId });
   const left = data.pieces - data.decided;
   const cells = [
-    { caption: 'Batch', value: <BatchTag stage={data.stage} number={data.batchNumber} href={`/batches/${data.batchId}`} /> },
+    {
+      caption: 'Batch',
+      value: <BatchTag stage={data.stage} number={data.batchNumber} href={`/batches/${data.batchId}`} />,
+    },
     { caption: 'Processor', value: data.processor },
     { caption: 'Kind', value: KIND_WORDS[data.kind] },
     { caption: 'Pieces', value: <Pieces count={data.pieces} /> },
-    { caption: 'Raised', value: <>{data.openedBy}, <Moment at={new Date(data.openedAt)} clock={clock} /></> },
+    {
+      caption: 'Raised',
+      value: (
+        <>
+          {data.openedBy}, <Moment at={new Date(data.openedAt)} clock={clock} />
+        </>
+      ),
+    },
   ];
   return (
     <>
-      <PageHead title={<span className="num text-thing">{data.number}</span>} cells={<TitleCells cells={cells} />} />
+      <PageHead
+        title={<span className="num text-thing">{data.number}</span>}
+        cells={<TitleCells cells={cells} />}
+      />
       <MainAndSide
         main={
           <>
             <What data={data} />
             {data.closedAt === null ? (
-              <Section title={`Decide about ${left === data.pieces ? '' : 'the other '}${left}`} note={data.kind === 'short' ? undefined : <><Pieces count={data.onHold} /> on hold</>}>
-                {mayDecide ? <DispositionForm key={data.version} nonconformance={data} /> : <p className="py-2 text-quiet">Inspectors decide about it.</p>}
+              <Section
+                title={`Decide about ${left === data.pieces ? '' : 'the other '}${left}`}
+                note={
+                  data.kind === 'short' ? undefined : (
+                    <>
+                      <Pieces count={data.onHold} /> on hold
+                    </>
+                  )
+                }
+              >
+                {mayDecide ? (
+                  <DispositionForm key={data.version} nonconformance={data} />
+                ) : (
+                  <p className="py-2 text-quiet">Inspectors decide about it.</p>
+                )}
               </Section>
             ) : (
               <Edge level="note">
-                <strong>Closed:</strong> nothing is left to decide, <Moment at={new Date(data.closedAt)} clock={clock} />.
+                <strong>Closed:</strong> nothing is left to decide,{' '}
+                <Moment at={new Date(data.closedAt)} clock={clock} />.
               </Edge>
             )}
           </>
@@ -61,11 +92,16 @@ function What({ data }: { data: NonconformanceDetail }) {
         <strong>{data.what}</strong>
       </p>
       <p className="text-second">
-        Line <span className="num">{data.lineNo}</span>, {data.partNumber} rev {data.partRevision}, {data.partName}; lot <span className="num">{data.lotNumber}</span>; <Pieces count={data.linePieces} /> ordered on {data.orderNumber}.
+        Line <span className="num">{data.lineNo}</span>, {data.partNumber} rev {data.partRevision},{' '}
+        {data.partName}; lot <span className="num">{data.lotNumber}</span>; <Pieces count={data.linePieces} />{' '}
+        ordered on {data.orderNumber}.
       </p>
       {data.requirement && (
         <p className="text-second">
-          {data.requirement.characteristic}: ordered <span className="num">{[data.requirement.limit, data.requirement.unit].filter(Boolean).join(' ')}</span>
+          {data.requirement.characteristic}: ordered{' '}
+          <span className="num">
+            {[data.requirement.limit, data.requirement.unit].filter(Boolean).join(' ')}
+          </span>
           {data.requirement.stated && (
             <>
               , stated <span className="num">{data.requirement.stated}</span>
@@ -85,12 +121,15 @@ function What({ data }: { data: NonconformanceDetail }) {
       )}
       {data.coveredPieces > 0 && (
         <p className="text-second">
-          <Pieces count={data.coveredPieces} /> of them were covered by a signed certificate. The hold took that proof away: they are proved again, or accepted by an authority.
+          <Pieces count={data.coveredPieces} /> of them were covered by a signed certificate. The hold took
+          that proof away: they are proved again, or accepted by an authority.
         </p>
       )}
       {data.reprocessedBefore > 0 && (
         <p className="text-second text-dispatched-ink">
-          Pieces of this lot went through this step again {data.reprocessedBefore === 1 ? 'once' : `${data.reprocessedBefore} times`} already. Look at the limit of the specification before you reprocess.
+          Pieces of this lot went through this step again{' '}
+          {data.reprocessedBefore === 1 ? 'once' : `${data.reprocessedBefore} times`} already. Look at the
+          limit of the specification before you reprocess.
         </p>
       )}
     </Section>

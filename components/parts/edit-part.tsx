@@ -16,13 +16,21 @@ export function EditPart({ partId }: { partId: string }) {
   const { data } = useRead(getPart, { partId });
   const [part] = useState(data);
   const edit = useWrite(editPart, { refreshes: [getPart, listParts] });
-  const fixed = part.lotCount > 0 ? `on the papers of ${part.lotCount === 1 ? '1 lot' : `${part.lotCount} lots`}; revise the part` : undefined;
+  const fixed =
+    part.lotCount > 0
+      ? `on the papers of ${part.lotCount === 1 ? '1 lot' : `${part.lotCount} lots`}; revise the part`
+      : undefined;
   return (
     <>
       <PageHead title={`Correct ${part.number} rev ${part.revision}`} sub={part.name} />
       <PartForm
         values={valuesOf(part)}
-        frozen={{ number: fixed, revision: fixed, serialised: fixed && (part.serialised ? 'Each piece has its own serial.' : 'Its pieces have no serials.') }}
+        frozen={{
+          number: fixed,
+          revision: fixed,
+          serialised:
+            fixed && (part.serialised ? 'Each piece has its own serial.' : 'Its pieces have no serials.'),
+        }}
         usedSteps={part.route.filter(({ used }) => used).map(({ id }) => id)}
         drawingName={part.drawing?.name}
         action="Keep the changes"
@@ -36,7 +44,8 @@ export function EditPart({ partId }: { partId: string }) {
       >
         {part.supersededAt !== null && (
           <Edge level="warn">
-            <strong>Rev {part.revision} is superseded.</strong> What you change here is for lots that were made from it.
+            <strong>Rev {part.revision} is superseded.</strong> What you change here is for lots that were
+            made from it.
           </Edge>
         )}
       </PartForm>

@@ -9,7 +9,13 @@ import { Section } from '@/components/ui/section';
 import { Cell, Row, Table } from '@/components/ui/table';
 import type { Part } from '@/lib/parts/contract';
 
-const COLUMNS = [{ says: 'Lot' }, { says: 'Heat' }, { says: 'Made' }, { says: 'Pieces', right: true }, { says: 'Where they are' }];
+const COLUMNS = [
+  { says: 'Lot' },
+  { says: 'Heat' },
+  { says: 'Made' },
+  { says: 'Pieces', right: true },
+  { says: 'Where they are' },
+];
 
 /** Where the part is used: its lots, and the place of their pieces. */
 export function LotsOfPart({ part }: { part: Part }) {

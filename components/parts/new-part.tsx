@@ -13,7 +13,10 @@ export function NewPart() {
   const create = useWrite(createPart, { refreshes: [listParts] });
   return (
     <>
-      <PageHead title="A new part" sub="One drawing number, what it is made from, and the outside steps it takes." />
+      <PageHead
+        title="A new part"
+        sub="One drawing number, what it is made from, and the outside steps it takes."
+      />
       <PartForm
         values={EMPTY_PART}
         action="Add the part"
@@ -21,7 +24,10 @@ export function NewPart() {
         cancelHref="/parts"
         save={async (input, options) => {
           const { id } = await create.mutateAsync(input, options);
-          showMessage({ says: `${input.number} rev ${input.revision} added.`, action: { says: 'Add a lot of it', href: `/lots/new?part=${id}` } });
+          showMessage({
+            says: `${input.number} rev ${input.revision} added.`,
+            action: { says: 'Add a lot of it', href: `/lots/new?part=${id}` },
+          });
           router.push(`/parts/${id}`);
         }}
       />

@@ -19,19 +19,80 @@ export function IdentityFields({ frozen }: { frozen: Frozen }) {
   return (
     <Section title="The part">
       <div className="grid grid-cols-6 gap-x-4 gap-y-3 py-2 max-md:grid-cols-2">
-        <TextField className="col-span-2" label="Drawing number" mono autoComplete="off" frozen={frozen.number} error={errors.number?.message} {...register('number')} />
-        <TextField className="max-md:col-span-2" label="Revision" mono autoComplete="off" frozen={frozen.revision} error={errors.revision?.message} {...register('revision')} />
-        <TextField className="col-span-3 max-md:col-span-2" label="Name" autoComplete="off" error={errors.name?.message} {...register('name')} />
-        <TextField className="col-span-2" label="Alloy" hint="as on the drawing: 2024, 6061, 4130" autoComplete="off" error={errors.alloy?.message} {...register('alloy')} />
-        <SelectField className="max-md:col-span-2" label="Product form" empty="Choose" options={PRODUCT_FORMS.map((value) => ({ value, says: value }))} error={errors.form?.message} {...register('form')} />
-        <TextField label="Thickness" mono hint="0.040 in or 1 mm" autoComplete="off" error={errors.thickness?.message} {...register('thickness')} />
-        <TextField label="Made in" mono hint="O" autoComplete="off" error={errors.madeCondition?.message} {...register('madeCondition')} />
-        <TextField label="Must end in" mono hint="T42" autoComplete="off" error={errors.endCondition?.message} {...register('endCondition')} />
+        <TextField
+          className="col-span-2"
+          label="Drawing number"
+          mono
+          autoComplete="off"
+          frozen={frozen.number}
+          error={errors.number?.message}
+          {...register('number')}
+        />
+        <TextField
+          className="max-md:col-span-2"
+          label="Revision"
+          mono
+          autoComplete="off"
+          frozen={frozen.revision}
+          error={errors.revision?.message}
+          {...register('revision')}
+        />
+        <TextField
+          className="col-span-3 max-md:col-span-2"
+          label="Name"
+          autoComplete="off"
+          error={errors.name?.message}
+          {...register('name')}
+        />
+        <TextField
+          className="col-span-2"
+          label="Alloy"
+          hint="as on the drawing: 2024, 6061, 4130"
+          autoComplete="off"
+          error={errors.alloy?.message}
+          {...register('alloy')}
+        />
+        <SelectField
+          className="max-md:col-span-2"
+          label="Product form"
+          empty="Choose"
+          options={PRODUCT_FORMS.map((value) => ({ value, says: value }))}
+          error={errors.form?.message}
+          {...register('form')}
+        />
+        <TextField
+          label="Thickness"
+          mono
+          hint="0.040 in or 1 mm"
+          autoComplete="off"
+          error={errors.thickness?.message}
+          {...register('thickness')}
+        />
+        <TextField
+          label="Made in"
+          mono
+          hint="O"
+          autoComplete="off"
+          error={errors.madeCondition?.message}
+          {...register('madeCondition')}
+        />
+        <TextField
+          label="Must end in"
+          mono
+          hint="T42"
+          autoComplete="off"
+          error={errors.endCondition?.message}
+          {...register('endCondition')}
+        />
       </div>
       <div className="flex flex-wrap gap-x-9">
         <Checkbox says="Clad" note="both faces or one" {...register('clad')} />
         {frozen.serialised === undefined ? (
-          <Checkbox says="Each piece has its own serial" error={errors.serialised?.message} {...register('serialised')} />
+          <Checkbox
+            says="Each piece has its own serial"
+            error={errors.serialised?.message}
+            {...register('serialised')}
+          />
         ) : (
           <p className="py-[5px] text-second text-quiet">{frozen.serialised}</p>
         )}
@@ -54,7 +115,15 @@ export function SizeFields() {
     <Section title="Size" note="with its unit, as you read it">
       <div className="grid grid-cols-2 gap-x-4 gap-y-3 py-2">
         {SIZES.map(({ name, label, hint }) => (
-          <TextField key={name} label={label} mono hint={hint} autoComplete="off" error={formState.errors[name]?.message} {...register(name)} />
+          <TextField
+            key={name}
+            label={label}
+            mono
+            hint={hint}
+            autoComplete="off"
+            error={formState.errors[name]?.message}
+            {...register(name)}
+          />
         ))}
       </div>
     </Section>
@@ -65,7 +134,12 @@ export function NoteField() {
   const { register, formState } = useFormContext<PartValues>();
   return (
     <Section title="Note">
-      <TextArea label="For the shop; it does not print on the traveller" rows={4} error={formState.errors.note?.message} {...register('note')} />
+      <TextArea
+        label="For the shop; it does not print on the traveller"
+        rows={4}
+        error={formState.errors.note?.message}
+        {...register('note')}
+      />
     </Section>
   );
 }

@@ -6,12 +6,43 @@ import type { Part, PartInput } from '@/lib/parts/contract';
 export type PartValues = z.input<typeof PartInput>;
 export type StepValues = NonNullable<PartValues['route']>[number];
 
-export const EMPTY_STEP = { process: '', specification: '', specificationRevision: '', classType: '', conditionBefore: '', targetCondition: '', toProve: [], note: '' } as unknown as StepValues;
-export const EMPTY_PROOF = { characteristic: '', limit: '', unit: '', source: 'specification' as const, sourceText: '' };
+export const EMPTY_STEP = {
+  process: '',
+  specification: '',
+  specificationRevision: '',
+  classType: '',
+  conditionBefore: '',
+  targetCondition: '',
+  toProve: [],
+  note: '',
+} as unknown as StepValues;
+export const EMPTY_PROOF = {
+  characteristic: '',
+  limit: '',
+  unit: '',
+  source: 'specification' as const,
+  sourceText: '',
+};
 
 export const EMPTY_PART = {
-  number: '', revision: '', name: '', alloy: '', form: '', clad: false, thickness: '', madeCondition: '', endCondition: '',
-  length: '', width: '', height: '', mass: '', area: '', serialised: false, note: '', drawingFileId: null, route: [EMPTY_STEP],
+  number: '',
+  revision: '',
+  name: '',
+  alloy: '',
+  form: '',
+  clad: false,
+  thickness: '',
+  madeCondition: '',
+  endCondition: '',
+  length: '',
+  width: '',
+  height: '',
+  mass: '',
+  area: '',
+  serialised: false,
+  note: '',
+  drawingFileId: null,
+  route: [EMPTY_STEP],
 } as unknown as PartValues;
 
 /** A part that is there, as its form begins with it. */

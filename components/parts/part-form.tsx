@@ -31,10 +31,28 @@ interface PartFormProps {
 }
 
 /** A part as a form: added, corrected or revised, always the same fields in the same places. */
-export function PartForm({ values, frozen = {}, usedSteps = [], drawingName, save, action, busyLabel, cancelHref, children }: PartFormProps) {
-  const form = useForm<PartValues, unknown, PartInput>({ resolver: zodResolver(PartInput), defaultValues: values });
+export function PartForm({
+  values,
+  frozen = {},
+  usedSteps = [],
+  drawingName,
+  save,
+  action,
+  busyLabel,
+  cancelHref,
+  children,
+}: PartFormProps) {
+  const form = useForm<PartValues, unknown, PartInput>({
+    resolver: zodResolver(PartInput),
+    defaultValues: values,
+  });
   const { errors, isSubmitting } = form.formState;
-  const submit = form.handleSubmit((input) => save(input, { onError: showOnForm(form) }).then(() => undefined, () => undefined));
+  const submit = form.handleSubmit((input) =>
+    save(input, { onError: showOnForm(form) }).then(
+      () => undefined,
+      () => undefined,
+    ),
+  );
 
   return (
     <FormProvider {...form}>

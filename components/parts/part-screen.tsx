@@ -30,7 +30,8 @@ export function PartScreen({ partId }: { partId: string }) {
       <PageHead
         title={
           <span className="[overflow-wrap:anywhere]">
-            <span className="num text-thing">{part.number}</span> <span className="text-section whitespace-nowrap">rev {part.revision}</span>
+            <span className="num text-thing">{part.number}</span>{' '}
+            <span className="text-section whitespace-nowrap">rev {part.revision}</span>
           </span>
         }
         sub={part.name}
@@ -39,7 +40,8 @@ export function PartScreen({ partId }: { partId: string }) {
       />
       {part.supersededAt !== null && current && (
         <Edge level="warn">
-          <strong>Superseded by rev {current.revision}.</strong> Its lots stay with it. <Link href={`/parts/${current.id}`}>Open rev {current.revision}</Link>
+          <strong>Superseded by rev {current.revision}.</strong> Its lots stay with it.{' '}
+          <Link href={`/parts/${current.id}`}>Open rev {current.revision}</Link>
         </Edge>
       )}
       <MainAndSide
@@ -51,12 +53,18 @@ export function PartScreen({ partId }: { partId: string }) {
         }
         side={
           <>
-            <Section title="Drawing">{part.drawing ? <FileLink file={part.drawing} className="block py-2" /> : <p className="py-2 text-dispatched-ink">None yet for rev {part.revision}.</p>}</Section>
+            <Section title="Drawing">
+              {part.drawing ? (
+                <FileLink file={part.drawing} className="block py-2" />
+              ) : (
+                <p className="py-2 text-dispatched-ink">None yet for rev {part.revision}.</p>
+              )}
+            </Section>
             <Sizes part={part} />
             {part.neededFor.length > 0 && <NeededFor part={part} />}
             {part.note && (
               <Section title="Note">
-                <p className="py-2 whitespace-pre-line [overflow-wrap:anywhere]">{part.note}</p>
+                <p className="py-2 [overflow-wrap:anywhere] whitespace-pre-line">{part.note}</p>
               </Section>
             )}
             <Revisions part={part} />
@@ -78,7 +86,9 @@ function Actions({ part, mayEdit, mayMake }: { part: Part; mayEdit: boolean; may
           Correct
         </ButtonLink>
       )}
-      {mayEdit && part.supersededAt === null && <ButtonLink href={`/parts/${part.id}/revise`}>Revise</ButtonLink>}
+      {mayEdit && part.supersededAt === null && (
+        <ButtonLink href={`/parts/${part.id}/revise`}>Revise</ButtonLink>
+      )}
       {mayMake && part.supersededAt === null && part.route.length > 0 && (
         <ButtonLink look="primary" href={`/lots/new?part=${part.id}`} shortcut="A">
           Add a lot
@@ -91,7 +101,16 @@ function Actions({ part, mayEdit, mayMake }: { part: Part; mayEdit: boolean; may
 function headCells(part: Part) {
   return [
     { caption: 'Material', value: materialWords(part) },
-    ...(part.thickness ? [{ caption: 'Thickness', value: <Measure entered={part.thickness.entered} base={inBaseUnit(part.thickness.value, 'length')} /> }] : []),
+    ...(part.thickness
+      ? [
+          {
+            caption: 'Thickness',
+            value: (
+              <Measure entered={part.thickness.entered} base={inBaseUnit(part.thickness.value, 'length')} />
+            ),
+          },
+        ]
+      : []),
     { caption: 'Condition', value: <Conditions made={part.madeCondition} end={part.endCondition} /> },
     { caption: 'Pieces', value: part.serialised ? 'each with its serial' : 'not numbered' },
   ];
@@ -102,7 +121,9 @@ function Measure({ entered, base }: { entered: string; base: string }) {
   return (
     <span className="whitespace-nowrap">
       <span className="num">{entered}</span>
-      {entered.replace(/\s/g, '') !== base.replace(/\s/g, '') && <span className="num text-source font-normal text-quiet"> {base}</span>}
+      {entered.replace(/\s/g, '') !== base.replace(/\s/g, '') && (
+        <span className="num text-source font-normal text-quiet"> {base}</span>
+      )}
     </span>
   );
 }
@@ -123,7 +144,9 @@ function Sizes({ part }: { part: Part }) {
         {known.map(({ says, measure, quantity }) => (
           <div key={says} className="contents">
             <dt className="text-quiet">{says}</dt>
-            <dd>{measure && <Measure entered={measure.entered} base={inBaseUnit(measure.value, quantity)} />}</dd>
+            <dd>
+              {measure && <Measure entered={measure.entered} base={inBaseUnit(measure.value, quantity)} />}
+            </dd>
           </div>
         ))}
       </dl>
@@ -138,7 +161,10 @@ function NeededFor({ part }: { part: Part }) {
       <ul>
         {part.neededFor.map((need) => (
           <li key={need.assemblyId} className="flex items-baseline gap-3 border-b border-rule py-2">
-            <Link href={`/assemblies/${need.assemblyId}`} className="min-w-0 flex-1 font-medium [overflow-wrap:anywhere]">
+            <Link
+              href={`/assemblies/${need.assemblyId}`}
+              className="min-w-0 flex-1 font-medium [overflow-wrap:anywhere]"
+            >
               {need.assembly}
             </Link>
             {need.neededOn && <Day day={need.neededOn} clock={clock} short />}
@@ -156,10 +182,24 @@ function Revisions({ part }: { part: Part }) {
   const clock = useClock();
   return (
     <Section title="Revisions">
-      <Table label="Revisions" keep columns={[{ says: 'Rev' }, { says: 'Added' }, { says: 'Lots', right: true }]}>
+      <Table
+        label="Revisions"
+        keep
+        columns={[{ says: 'Rev' }, { says: 'Added' }, { says: 'Lots', right: true }]}
+      >
         {part.revisions.map((revision) => (
-          <Row key={revision.id} selected={revision.id === part.id} state={revision.supersededAt === null ? 'rest' : 'off'}>
-            <Cell code>{revision.id === part.id ? revision.revision : <Link href={`/parts/${revision.id}`}>{revision.revision}</Link>}</Cell>
+          <Row
+            key={revision.id}
+            selected={revision.id === part.id}
+            state={revision.supersededAt === null ? 'rest' : 'off'}
+          >
+            <Cell code>
+              {revision.id === part.id ? (
+                revision.revision
+              ) : (
+                <Link href={`/parts/${revision.id}`}>{revision.revision}</Link>
+              )}
+            </Cell>
             <Cell>
               <Moment at={new Date(revision.createdAt)} clock={clock} />
               {revision.supersededAt !== null && <span className="text-quiet">, superseded</span>}

@@ -23,11 +23,21 @@ export interface PartFilter {
   superseded?: '1';
 }
 
-const COLUMNS = [{ says: 'Part' }, { says: 'Material' }, { says: 'Thickness', right: true }, { says: 'Condition' }, { says: 'Outside steps' }, { says: 'Lots', right: true }, { says: 'Where its pieces are' }];
+const COLUMNS = [
+  { says: 'Part' },
+  { says: 'Material' },
+  { says: 'Thickness', right: true },
+  { says: 'Condition' },
+  { says: 'Outside steps' },
+  { says: 'Lots', right: true },
+  { says: 'Where its pieces are' },
+];
 
 /** Every part by its drawing number. */
 export function PartsScreen({ filter }: { filter: PartFilter }) {
-  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listParts, { ...filter });
+  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listParts, {
+    ...filter,
+  });
   const may = useMay('part.edit');
   const rows = data?.pages.flatMap((page) => page.rows) ?? [];
   return (
@@ -63,8 +73,21 @@ export function PartsScreen({ filter }: { filter: PartFilter }) {
 }
 
 function NoParts({ isFiltered, may }: { isFiltered: boolean; may: boolean }) {
-  if (isFiltered) return <Empty says="No part is like that." comes="Look at the number again, or at all parts." action={<Link href="/parts">Show all parts</Link>} />;
-  return <Empty says="There are no parts yet." comes="A part is a drawing number, what it is made from and its way through outside processes." action={may && <Link href="/parts/new">Add a part</Link>} />;
+  if (isFiltered)
+    return (
+      <Empty
+        says="No part is like that."
+        comes="Look at the number again, or at all parts."
+        action={<Link href="/parts">Show all parts</Link>}
+      />
+    );
+  return (
+    <Empty
+      says="There are no parts yet."
+      comes="A part is a drawing number, what it is made from and its way through outside processes."
+      action={may && <Link href="/parts/new">Add a part</Link>}
+    />
+  );
 }
 
 function PartLine({ row }: { row: PartRow }) {
@@ -75,17 +98,26 @@ function PartLine({ row }: { row: PartRow }) {
         <Link href={`/parts/${row.id}`} className="num font-semibold [overflow-wrap:anywhere]">
           {row.number}
         </Link>{' '}
-        <span className="whitespace-nowrap text-quiet">rev {row.revision}</span> <span className="font-cond">{row.name}</span>
+        <span className="whitespace-nowrap text-quiet">rev {row.revision}</span>{' '}
+        <span className="font-cond">{row.name}</span>
         {row.supersededAt !== null && <span className="text-quiet">, superseded</span>}
       </Cell>
-      <Cell head="Material" className="whitespace-nowrap">{materialWords(row)}</Cell>
+      <Cell head="Material" className="whitespace-nowrap">
+        {materialWords(row)}
+      </Cell>
       <Cell figure head="Thickness" className="whitespace-nowrap">
         {row.thickness}
       </Cell>
       <Cell head="Condition" className="whitespace-nowrap">
         <Conditions made={row.madeCondition} end={row.endCondition} />
       </Cell>
-      <Cell head="Steps">{row.processes.length === 0 ? <span className="text-dispatched-ink">none yet</span> : row.processes.map((process) => PROCESS_WORDS[process]).join(', then ')}</Cell>
+      <Cell head="Steps">
+        {row.processes.length === 0 ? (
+          <span className="text-dispatched-ink">none yet</span>
+        ) : (
+          row.processes.map((process) => PROCESS_WORDS[process]).join(', then ')
+        )}
+      </Cell>
       <Cell figure head="Lots">
         {row.lots}
       </Cell>

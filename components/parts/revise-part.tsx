@@ -26,12 +26,17 @@ export function RevisePart({ partId }: { partId: string }) {
         cancelHref={`/parts/${partId}`}
         save={async (input, options) => {
           const { id } = await revise.mutateAsync({ ...input, partId }, options);
-          showMessage({ says: `${part.number} rev ${input.revision} takes the place of rev ${part.revision}.` });
+          showMessage({
+            says: `${part.number} rev ${input.revision} takes the place of rev ${part.revision}.`,
+          });
           router.push(`/parts/${id}`);
         }}
       >
         <Edge level="note">
-          <strong>Rev {part.revision} will be superseded.</strong> {part.lotCount > 0 && `Its ${part.lotCount === 1 ? 'lot stays' : `${part.lotCount} lots stay`} with it, with its drawing and its steps. `}New lots are made from the revision you add here.
+          <strong>Rev {part.revision} will be superseded.</strong>{' '}
+          {part.lotCount > 0 &&
+            `Its ${part.lotCount === 1 ? 'lot stays' : `${part.lotCount} lots stay`} with it, with its drawing and its steps. `}
+          New lots are made from the revision you add here.
         </Edge>
       </PartForm>
     </>

@@ -19,7 +19,12 @@ export function RouteEditor({ usedSteps }: { usedSteps: readonly string[] }) {
   return (
     <Section title="Outside steps" note="in the order the pieces take them">
       {fault && <FieldError id="route-error" says={fault} />}
-      {fields.length === 0 && <Empty says="No step yet." comes="A part needs at least one outside step before lots of it can be made." />}
+      {fields.length === 0 && (
+        <Empty
+          says="No step yet."
+          comes="A part needs at least one outside step before lots of it can be made."
+        />
+      )}
       <ol>
         {fields.map((field, at) => (
           <StepFields
@@ -84,13 +89,56 @@ function StepFields({ at, isLast, isUsed, onUp, onDown, onRemove }: StepFieldsPr
           </span>
         </div>
         <div className="grid grid-cols-6 gap-x-4 gap-y-3 pt-1.5 max-md:grid-cols-2">
-          <SelectField className="col-span-2" label="Process" empty="Choose" options={PROCESS_OPTIONS} error={errors?.process?.message} {...register(`route.${at}.process`)} />
-          <TextField className="col-span-2" label="Specification" mono autoComplete="off" error={errors?.specification?.message} {...register(`route.${at}.specification`)} />
-          <TextField label="Its revision" mono autoComplete="off" error={errors?.specificationRevision?.message} {...register(`route.${at}.specificationRevision`)} />
-          <TextField label="Class, type, grade" autoComplete="off" error={errors?.classType?.message} {...register(`route.${at}.classType`)} />
-          <TextField label="From condition" mono autoComplete="off" error={errors?.conditionBefore?.message} {...register(`route.${at}.conditionBefore`)} />
-          <TextField label="To condition" mono autoComplete="off" error={errors?.targetCondition?.message} {...register(`route.${at}.targetCondition`)} />
-          <TextField className="col-span-4 max-md:col-span-2" label="Note to the processor" autoComplete="off" error={errors?.note?.message} {...register(`route.${at}.note`)} />
+          <SelectField
+            className="col-span-2"
+            label="Process"
+            empty="Choose"
+            options={PROCESS_OPTIONS}
+            error={errors?.process?.message}
+            {...register(`route.${at}.process`)}
+          />
+          <TextField
+            className="col-span-2"
+            label="Specification"
+            mono
+            autoComplete="off"
+            error={errors?.specification?.message}
+            {...register(`route.${at}.specification`)}
+          />
+          <TextField
+            label="Its revision"
+            mono
+            autoComplete="off"
+            error={errors?.specificationRevision?.message}
+            {...register(`route.${at}.specificationRevision`)}
+          />
+          <TextField
+            label="Class, type, grade"
+            autoComplete="off"
+            error={errors?.classType?.message}
+            {...register(`route.${at}.classType`)}
+          />
+          <TextField
+            label="From condition"
+            mono
+            autoComplete="off"
+            error={errors?.conditionBefore?.message}
+            {...register(`route.${at}.conditionBefore`)}
+          />
+          <TextField
+            label="To condition"
+            mono
+            autoComplete="off"
+            error={errors?.targetCondition?.message}
+            {...register(`route.${at}.targetCondition`)}
+          />
+          <TextField
+            className="col-span-4 max-md:col-span-2"
+            label="Note to the processor"
+            autoComplete="off"
+            error={errors?.note?.message}
+            {...register(`route.${at}.note`)}
+          />
         </div>
         <ProofEditor step={at} />
       </fieldset>

@@ -10,9 +10,16 @@ const PROOF_COLUMNS = [{ says: 'To be proved' }, { says: 'Limit' }, { says: 'Fro
 /** The outside steps in order, each with what its papers must show. */
 export function RouteOfPart({ part }: { part: Part }) {
   return (
-    <Section title="Outside steps" note={part.route.length > 0 ? 'in the order the pieces take them' : undefined}>
+    <Section
+      title="Outside steps"
+      note={part.route.length > 0 ? 'in the order the pieces take them' : undefined}
+    >
       {part.route.length === 0 && (
-        <Empty says="No step yet." comes="A part needs at least one outside step before lots of it can be made." action={<Link href={`/parts/${part.id}/edit`}>Add the first step</Link>} />
+        <Empty
+          says="No step yet."
+          comes="A part needs at least one outside step before lots of it can be made."
+          action={<Link href={`/parts/${part.id}/edit`}>Add the first step</Link>}
+        />
       )}
       <ol>
         {part.route.map((step) => (
@@ -51,7 +58,7 @@ function Step({ step }: { step: RouteStep }) {
             </span>
           )}
         </div>
-        {step.note && <p className="text-quiet [overflow-wrap:anywhere]">{step.note}</p>}
+        {step.note && <p className="[overflow-wrap:anywhere] text-quiet">{step.note}</p>}
         {step.toProve.length > 0 && (
           <Table label={`To be proved at step ${step.seq}`} columns={PROOF_COLUMNS} dense className="mt-1">
             {step.toProve.map((proof, at) => (

@@ -8,7 +8,12 @@ import { TextField } from '@/components/ui/field';
 import { showMessage } from '@/components/ui/message';
 import { Section } from '@/components/ui/section';
 import { Cell, Row, Table } from '@/components/ui/table';
-import { inviteColleague, listColleagues, setColleagueActive, type Colleague } from '@/lib/people/team-contract';
+import {
+  inviteColleague,
+  listColleagues,
+  setColleagueActive,
+  type Colleague,
+} from '@/lib/people/team-contract';
 
 import { FormRefusal } from './public-page';
 
@@ -17,7 +22,10 @@ export function Colleagues() {
   const { data } = useRead(listColleagues, {});
   return (
     <Section title="People with an account here" note="each sees all batches of your company">
-      <Table label="People with an account" columns={[{ says: 'Name' }, { says: 'E-mail' }, { says: 'Action', hidden: true, right: true }]}>
+      <Table
+        label="People with an account"
+        columns={[{ says: 'Name' }, { says: 'E-mail' }, { says: 'Action', hidden: true, right: true }]}
+      >
         {data.people.map((person) => (
           <ColleagueRow key={person.personId} person={person} />
         ))}
@@ -30,7 +38,15 @@ export function Colleagues() {
 function ColleagueRow({ person }: { person: Colleague }) {
   const write = useWrite(setColleagueActive, { refreshes: [listColleagues] });
   const { personId, name, email, active, isMe } = person;
-  const change = () => write.mutate({ personId, active: !active }, { onSuccess: () => showMessage({ says: active ? `${name} can no longer enter.` : `${name} can enter again.` }), onError: (error) => showMessage({ says: error.message, failed: true }) });
+  const change = () =>
+    write.mutate(
+      { personId, active: !active },
+      {
+        onSuccess: () =>
+          showMessage({ says: active ? `${name} can no longer enter.` : `${name} can enter again.` }),
+        onError: (error) => showMessage({ says: error.message, failed: true }),
+      },
+    );
   return (
     <Row state={active ? 'rest' : 'off'}>
       <Cell strong head="Name">
@@ -66,8 +82,19 @@ function InviteColleague() {
   return (
     <form noValidate onSubmit={(event) => void send(event)} className="flex flex-col gap-3 pt-3">
       <div className="grid gap-3 md:grid-cols-2">
-        <TextField label="Name of a colleague" autoComplete="off" error={errors.name?.message} {...form.register('name')} />
-        <TextField label="E-mail" type="email" autoComplete="off" error={errors.email?.message} {...form.register('email')} />
+        <TextField
+          label="Name of a colleague"
+          autoComplete="off"
+          error={errors.name?.message}
+          {...form.register('name')}
+        />
+        <TextField
+          label="E-mail"
+          type="email"
+          autoComplete="off"
+          error={errors.email?.message}
+          {...form.register('email')}
+        />
       </div>
       <FormRefusal says={errors.root?.message} />
       <div>

@@ -37,7 +37,11 @@ export function Invitation({ token, signIn }: { token: string; signIn: SignInAct
           <p>
             {email} has an account. It keeps its name and password and gains {organisation}.
           </p>
-          <JoinButton token={token} organisation={organisation} done={(joined) => router.push(`/sign-in?email=${encodeURIComponent(joined)}`)} />
+          <JoinButton
+            token={token}
+            organisation={organisation}
+            done={(joined) => router.push(`/sign-in?email=${encodeURIComponent(joined)}`)}
+          />
         </>
       ) : (
         <AcceptForm token={token} email={email} name={name ?? ''} signIn={signIn} />

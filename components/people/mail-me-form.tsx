@@ -30,19 +30,35 @@ export function MailMeForm({ for: purpose, next }: MailMeFormProps) {
     return (
       <div role="status">
         <p>
-          If <strong>{sentTo}</strong> has an account, a link is on its way. It works once, for {purpose === 'reset' ? 'an hour' : '20 minutes'}.
+          If <strong>{sentTo}</strong> has an account, a link is on its way. It works once, for{' '}
+          {purpose === 'reset' ? 'an hour' : '20 minutes'}.
         </p>
-        <p className="pt-2 text-quiet">Nothing there in two minutes? Look among the unwanted mails, then ask again.</p>
+        <p className="pt-2 text-quiet">
+          Nothing there in two minutes? Look among the unwanted mails, then ask again.
+        </p>
       </div>
     );
   }
   const { errors } = form.formState;
   return (
     <form noValidate onSubmit={(event) => void send(event)} className="flex flex-col gap-4">
-      <TextField label="E-mail" type="email" autoComplete="username" autoFocus error={errors.email?.message} {...form.register('email', { required: 'Enter your e-mail address.' })} />
+      <TextField
+        label="E-mail"
+        type="email"
+        autoComplete="username"
+        autoFocus
+        error={errors.email?.message}
+        {...form.register('email', { required: 'Enter your e-mail address.' })}
+      />
       <FormRefusal says={errors.root?.message} />
       <div>
-        <Button type="submit" look="primary" size="big" busy={link.isPending || reset.isPending} busyLabel="Sending">
+        <Button
+          type="submit"
+          look="primary"
+          size="big"
+          busy={link.isPending || reset.isPending}
+          busyLabel="Sending"
+        >
           {purpose === 'reset' ? 'Mail me a link to choose one' : 'Mail me a link'}
         </Button>
       </div>

@@ -30,6 +30,10 @@ export function PublicPage({ title, lead, children }: PublicPageProps) {
 /** What did not work, above the form, where it is heard at once. */
 export function FormRefusal({ says }: { says: string | undefined }) {
   return (
-    <div role="alert">{says !== undefined && says !== '' && <p className="border-l-4 border-held py-[3px] pl-3 text-held-ink">{says}</p>}</div>
+    <div role="alert">
+      {says !== undefined && says !== '' && (
+        <p className="border-l-4 border-held py-[3px] pl-3 text-held-ink">{says}</p>
+      )}
+    </div>
   );
 }

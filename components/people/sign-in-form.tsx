@@ -18,14 +18,33 @@ interface SignInFormProps {
 
 /** Works before any script has come: the fields are a plain form. */
 export function SignInForm({ action, next, email, refused }: SignInFormProps) {
-  const [state, submit, isPending] = useActionState(action, { ...(email ? { email } : {}), ...(refused ? { says: refused } : {}) });
+  const [state, submit, isPending] = useActionState(action, {
+    ...(email ? { email } : {}),
+    ...(refused ? { says: refused } : {}),
+  });
   const query = next === '/' ? '' : `?next=${encodeURIComponent(next)}`;
   return (
     <>
       <form action={submit} className="flex flex-col gap-4">
         <input type="hidden" name="next" value={next} />
-        <TextField label="E-mail" name="email" type="email" autoComplete="username" required defaultValue={state.email} key={state.email} autoFocus={!state.email} />
-        <TextField label="Password" name="password" type="password" autoComplete="current-password" required autoFocus={Boolean(state.email)} />
+        <TextField
+          label="E-mail"
+          name="email"
+          type="email"
+          autoComplete="username"
+          required
+          defaultValue={state.email}
+          key={state.email}
+          autoFocus={!state.email}
+        />
+        <TextField
+          label="Password"
+          name="password"
+          type="password"
+          autoComplete="current-password"
+          required
+          autoFocus={Boolean(state.email)}
+        />
         <FormRefusal says={state.says} />
         <div>
           <Button type="submit" look="primary" size="big" busy={isPending} busyLabel="Signing in">

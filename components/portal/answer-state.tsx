@@ -16,7 +16,8 @@ export function AnswerState({ answer: { waiting, refusal, forget }, what }: Answ
     return (
       <Edge level="warn">
         <div role="status">
-          <strong>No network.</strong> {what} is kept on this phone for {KEPT_DAYS} days and is sent when the network is back.
+          <strong>No network.</strong> {what} is kept on this phone for {KEPT_DAYS} days and is sent when the
+          network is back.
         </div>
         <Button look="word" onClick={forget}>
           Do not send it

@@ -33,7 +33,7 @@ function Asked({ batch, clock }: { batch: PortalBatch; clock: Clock }) {
           <AskedLine key={line.id} line={line} />
         ))}
       </ul>
-      {batch.note && <p className="pt-2 whitespace-pre-line [overflow-wrap:anywhere]">{batch.note}</p>}
+      {batch.note && <p className="pt-2 [overflow-wrap:anywhere] whitespace-pre-line">{batch.note}</p>}
       {cautions.length > 0 && (
         <Caution>
           {cautions.map((caution) => (
@@ -56,8 +56,10 @@ function AskedLine({ line }: { line: PortalLine }) {
       <span className="num w-4 flex-none text-faint">{line.lineNo}</span>
       <div className="min-w-0 flex-1">
         <strong className="num [overflow-wrap:anywhere]">{line.part}</strong>
-        <div className="text-second text-quiet [overflow-wrap:anywhere]">{[line.name, line.material, change].filter(Boolean).join(', ')}</div>
-        <div className="text-second text-quiet [overflow-wrap:anywhere]">
+        <div className="text-second [overflow-wrap:anywhere] text-quiet">
+          {[line.name, line.material, change].filter(Boolean).join(', ')}
+        </div>
+        <div className="text-second [overflow-wrap:anywhere] text-quiet">
           lot <span className="num">{line.lotNumber}</span>
           {line.serials.length > 0 && <>, pieces {line.serials.join(', ')}</>}
         </div>
@@ -81,7 +83,8 @@ function ToProve({ batch: { requirements } }: { batch: PortalBatch }) {
         {requirements.map((one) => (
           <li key={one.id} className="border-b border-rule py-1.5 [overflow-wrap:anywhere]">
             {one.lineNo !== null && <span className="text-quiet">line {one.lineNo}: </span>}
-            <strong>{one.characteristic}</strong> <span className="num">{[one.limit, one.unit].filter(Boolean).join(' ')}</span>
+            <strong>{one.characteristic}</strong>{' '}
+            <span className="num">{[one.limit, one.unit].filter(Boolean).join(' ')}</span>
             <span className="text-source text-faint"> {one.sourceText || one.source}</span>
           </li>
         ))}
@@ -93,7 +96,9 @@ function ToProve({ batch: { requirements } }: { batch: PortalBatch }) {
 const DOCUMENT_WORDS = { traveller: 'Traveller', purchase_order: 'Purchase order' } as const;
 
 function Documents({ batch: { documents }, clock }: { batch: PortalBatch; clock: Clock }) {
-  const latest = documents.filter((one, at) => documents.findIndex((other) => other.kind === one.kind) === at);
+  const latest = documents.filter(
+    (one, at) => documents.findIndex((other) => other.kind === one.kind) === at,
+  );
   const changes = latest.find((one) => one.documentVersion > 1)?.changes ?? [];
   if (latest.length === 0) return null;
   return (
@@ -112,11 +117,19 @@ function Documents({ batch: { documents }, clock }: { batch: PortalBatch; clock:
         {latest.map((one) => (
           <li key={one.id} className="py-0.5">
             {one.fileId === null ? (
-              <span className="text-quiet">{DOCUMENT_WORDS[one.kind]} is being made; it is here in a moment</span>
+              <span className="text-quiet">
+                {DOCUMENT_WORDS[one.kind]} is being made; it is here in a moment
+              </span>
             ) : (
-              <a className="lw-word-button" href={`/api/files/${one.fileId}/content?inline=1`} target="_blank" rel="noreferrer">
+              <a
+                className="lw-word-button"
+                href={`/api/files/${one.fileId}/content?inline=1`}
+                target="_blank"
+                rel="noreferrer"
+              >
                 {DOCUMENT_WORDS[one.kind]}
-                {one.documentVersion > 1 && `, version ${one.documentVersion} of ${dayWords(new Date(one.statedAt), clock)}`}
+                {one.documentVersion > 1 &&
+                  `, version ${one.documentVersion} of ${dayWords(new Date(one.statedAt), clock)}`}
               </a>
             )}
           </li>

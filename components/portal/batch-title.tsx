@@ -11,8 +11,9 @@ export function BatchTitle({ batch, clock }: { batch: PortalBatch; clock: Clock 
       <h1 className="pt-2.5 text-[1.4375rem] leading-[1.6875rem] text-balance [overflow-wrap:anywhere]">
         {whatWords(batch)}: {asked}
       </h1>
-      <p className="pt-0.5 text-quiet [overflow-wrap:anywhere]">
-        {specification}. Order <span className="num">{orderNumber}</span>. For you, <strong>{processor}</strong>.
+      <p className="pt-0.5 [overflow-wrap:anywhere] text-quiet">
+        {specification}. Order <span className="num">{orderNumber}</span>. For you,{' '}
+        <strong>{processor}</strong>.
         {wantedBackOn !== null && <> Wanted back by {dayWords(wantedBackOn, clock)}.</>}
       </p>
     </div>

@@ -26,12 +26,23 @@ export function DayChoiceButtons({ wantedBackOn, clock, answer, onAnswer, error 
     <>
       <div role="group" aria-label="When will they be done" className="grid grid-cols-3 gap-2">
         {choices.map(({ day, asked }) => (
-          <button key={day} type="button" aria-pressed={!answer.other && answer.day === day} className={box(!answer.other && answer.day === day)} onClick={() => onAnswer({ day, other: false })}>
+          <button
+            key={day}
+            type="button"
+            aria-pressed={!answer.other && answer.day === day}
+            className={box(!answer.other && answer.day === day)}
+            onClick={() => onAnswer({ day, other: false })}
+          >
             {dayWords(day, clock)}
             {asked && <span className="font-cond text-caption">asked by the shop</span>}
           </button>
         ))}
-        <button type="button" aria-pressed={answer.other} className={box(answer.other)} onClick={() => onAnswer({ day: answer.day, other: true })}>
+        <button
+          type="button"
+          aria-pressed={answer.other}
+          className={box(answer.other)}
+          onClick={() => onAnswer({ day: answer.day, other: true })}
+        >
           Other day
         </button>
       </div>
@@ -46,7 +57,12 @@ export function DayChoiceButtons({ wantedBackOn, clock, answer, onAnswer, error 
           error={error}
         />
       )}
-      <button type="button" className="lw-word-button mt-1" aria-pressed={!answer.other && answer.day === null} onClick={() => onAnswer({ day: null, other: false })}>
+      <button
+        type="button"
+        className="lw-word-button mt-1"
+        aria-pressed={!answer.other && answer.day === null}
+        onClick={() => onAnswer({ day: null, other: false })}
+      >
         {!answer.other && answer.day === null ? 'No day yet; you can promise one later' : 'Cannot say yet'}
       </button>
     </>

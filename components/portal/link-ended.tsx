@@ -9,7 +9,8 @@ export function LinkEnded({ state, batch }: LinkFace) {
       <>
         <h1 className="text-[1.4375rem] leading-[1.6875rem]">This is not a link of ours</h1>
         <p className="pt-2">
-          Perhaps it was cut when it was copied. Open it from the mail itself, or ask the shop that sent you the parts for a new one.
+          Perhaps it was cut when it was copied. Open it from the mail itself, or ask the shop that sent you
+          the parts for a new one.
         </p>
         <SignIn />
       </>
@@ -30,10 +31,22 @@ export function LinkEnded({ state, batch }: LinkFace) {
 
 type Batch = NonNullable<LinkFace['batch']>;
 
-const WORDS: Record<'withdrawn' | 'settled' | 'cancelled', (batch: Batch) => { says: string; todo: ReactNode }> = {
-  withdrawn: ({ shop, number }) => ({ says: `${shop} has withdrawn this link`, todo: `Look for a later mail about ${number}; it may carry a new one. Otherwise ask the shop to send it.` }),
-  settled: ({ number, shop }) => ({ says: `${number} is settled`, todo: `Its papers are accepted and its invoice is paid, so the link has ended. If something is still open, write to ${shop}.` }),
-  cancelled: ({ number, shop }) => ({ says: `${shop} has cancelled ${number}`, todo: 'Do not work on it. Its pieces go back to the shop as they are.' }),
+const WORDS: Record<
+  'withdrawn' | 'settled' | 'cancelled',
+  (batch: Batch) => { says: string; todo: ReactNode }
+> = {
+  withdrawn: ({ shop, number }) => ({
+    says: `${shop} has withdrawn this link`,
+    todo: `Look for a later mail about ${number}; it may carry a new one. Otherwise ask the shop to send it.`,
+  }),
+  settled: ({ number, shop }) => ({
+    says: `${number} is settled`,
+    todo: `Its papers are accepted and its invoice is paid, so the link has ended. If something is still open, write to ${shop}.`,
+  }),
+  cancelled: ({ number, shop }) => ({
+    says: `${shop} has cancelled ${number}`,
+    todo: 'Do not work on it. Its pieces go back to the shop as they are.',
+  }),
 };
 
 function Ring({ shop, shopPhone }: Batch) {
@@ -48,7 +61,8 @@ function Ring({ shop, shopPhone }: Batch) {
 function SignIn() {
   return (
     <p className="pt-4 text-second leading-5 text-quiet">
-      People of the processor who have an account see all their batches after they <a href="/sign-in">sign in</a>.
+      People of the processor who have an account see all their batches after they{' '}
+      <a href="/sign-in">sign in</a>.
     </p>
   );
 }

@@ -25,16 +25,20 @@ export function LinkOpen({ batch, now, action, at, straightTo, signedInAs }: Lin
     <>
       <BatchTag size="phone" stage={batch.stage} number={batch.number} />
       <h1 className="pt-2.5 text-[1.4375rem] leading-[1.6875rem] text-balance">
-        {batch.pieces.toLocaleString('en-US')} {batch.pieces === 1 ? 'piece' : 'pieces'}: {PROCESS_WORDS[batch.process]}
+        {batch.pieces.toLocaleString('en-US')} {batch.pieces === 1 ? 'piece' : 'pieces'}:{' '}
+        {PROCESS_WORDS[batch.process]}
       </h1>
       <p className="pt-1 text-quiet">
-        {batch.specification}. Order <span className="num text-ink">{batch.orderNumber}</span> of {batch.shop}. For you, <strong className="text-ink">{batch.processor}</strong>.
+        {batch.specification}. Order <span className="num text-ink">{batch.orderNumber}</span> of {batch.shop}
+        . For you, <strong className="text-ink">{batch.processor}</strong>.
         {batch.wantedBackOn !== null && <> Wanted back by {dayWords(batch.wantedBackOn, clock)}.</>}
       </p>
       {straightTo === undefined ? (
         <form method="post" action={action} className="pt-5">
           {at !== undefined && <input type="hidden" name="at" value={at} />}
-          {signedInAs !== undefined && <Caution>This device is signed in as {signedInAs}. Opening the link ends that here.</Caution>}
+          {signedInAs !== undefined && (
+            <Caution>This device is signed in as {signedInAs}. Opening the link ends that here.</Caution>
+          )}
           <Button type="submit" look="primary" size="big" className="w-full">
             Open {batch.number}
           </Button>
@@ -47,7 +51,8 @@ export function LinkOpen({ batch, now, action, at, straightTo, signedInAs }: Lin
         </div>
       )}
       <p className="pt-4 text-second leading-5 text-quiet">
-        No password is needed. The link opens this batch and nothing else, as often as you like, on this device and on others, until the batch is settled or {batch.shop} withdraws it.
+        No password is needed. The link opens this batch and nothing else, as often as you like, on this
+        device and on others, until the batch is settled or {batch.shop} withdraws it.
       </p>
     </>
   );

@@ -7,7 +7,13 @@ import { FileUpload } from '@/components/files/file-upload';
 import { Failing } from '@/components/ui/failing';
 import { SegmentButtons } from '@/components/ui/segments';
 import { momentWords, type Clock } from '@/lib/day-words';
-import { getPortalBatch, sendPaper, type PaperKind, type PortalBatch, type PortalPaper } from '@/lib/portal/contract';
+import {
+  getPortalBatch,
+  sendPaper,
+  type PaperKind,
+  type PortalBatch,
+  type PortalPaper,
+} from '@/lib/portal/contract';
 
 import { Step } from './step';
 
@@ -19,13 +25,22 @@ const KINDS: readonly { value: PaperKind; says: string }[] = [
 
 /** Certificate, furnace chart, invoice: sent in a minute from a phone, and what the shop has made of each. */
 export function PapersStep({ batch, clock }: { batch: PortalBatch; clock: Clock }) {
-  const has = (kind: PaperKind) => batch.papers.some((paper) => paper.kind === kind && !['set_aside', 'refused'].includes(paper.state));
-  const [kind, setKind] = useState<PaperKind>(has('certificate') && !has('invoice') ? 'invoice' : 'certificate');
+  const has = (kind: PaperKind) =>
+    batch.papers.some((paper) => paper.kind === kind && !['set_aside', 'refused'].includes(paper.state));
+  const [kind, setKind] = useState<PaperKind>(
+    has('certificate') && !has('invoice') ? 'invoice' : 'certificate',
+  );
   const [handedIn, setHandedIn] = useState(0);
   const send = useWrite(sendPaper, { refreshes: [getPortalBatch] });
   const complete = has('certificate') && has('invoice');
   return (
-    <Step number={3} id="papers" state={complete ? 'done' : 'open'} title="Send the papers" aside={wantedWords(has('certificate'), has('invoice'))}>
+    <Step
+      number={3}
+      id="papers"
+      state={complete ? 'done' : 'open'}
+      title="Send the papers"
+      aside={wantedWords(has('certificate'), has('invoice'))}
+    >
       {batch.papers.length > 0 && (
         <ul aria-label="Papers sent" className="pb-3">
           {batch.papers.map((paper) => (
@@ -41,10 +56,20 @@ export function PapersStep({ batch, clock }: { batch: PortalBatch; clock: Clock 
           batchId={batch.id}
           label={`${KINDS.find((one) => one.value === kind)?.says ?? ''} for ${batch.number}`}
           hint="PDF, or a photo in which every line can be read. Up to 50 MB."
-          onArrived={(file) => send.mutate({ batchId: batch.id, kind, fileId: file.id }, { onSuccess: () => setHandedIn((count) => count + 1) })}
+          onArrived={(file) =>
+            send.mutate(
+              { batchId: batch.id, kind, fileId: file.id },
+              { onSuccess: () => setHandedIn((count) => count + 1) },
+            )
+          }
         />
       </div>
-      {send.isError && <Failing says={`It has arrived but is not handed in: ${send.error.problem.title}`} stands="Choose the same file again to hand it in." />}
+      {send.isError && (
+        <Failing
+          says={`It has arrived but is not handed in: ${send.error.problem.title}`}
+          stands="Choose the same file again to hand it in."
+        />
+      )}
     </Step>
   );
 }
@@ -54,14 +79,25 @@ function wantedWords(certificate: boolean, invoice: boolean): string | null {
   return wanted.length === 0 ? null : `${wanted.join(' and ')} wanted`;
 }
 
-const KIND_WORDS: Record<PaperKind, string> = { certificate: 'certificate', chart: 'chart', invoice: 'invoice' };
+const KIND_WORDS: Record<PaperKind, string> = {
+  certificate: 'certificate',
+  chart: 'chart',
+  invoice: 'invoice',
+};
 
 function Paper({ paper, clock }: { paper: PortalPaper; clock: Clock }) {
   const bad = paper.state === 'set_aside' || paper.state === 'refused';
   return (
-    <li className={`flex flex-wrap items-baseline gap-x-3 border-b border-rule py-2 ${bad ? 'border-l-4 border-l-held bg-held-wash pl-3' : ''}`}>
+    <li
+      className={`flex flex-wrap items-baseline gap-x-3 border-b border-rule py-2 ${bad ? 'border-l-4 border-l-held bg-held-wash pl-3' : ''}`}
+    >
       <div className="min-w-0 flex-1 basis-52">
-        {paper.file ? <FileLink file={paper.file} /> : <strong>{paper.number ?? `A ${KIND_WORDS[paper.kind]}`}</strong>}, {KIND_WORDS[paper.kind]}
+        {paper.file ? (
+          <FileLink file={paper.file} />
+        ) : (
+          <strong>{paper.number ?? `A ${KIND_WORDS[paper.kind]}`}</strong>
+        )}
+        , {KIND_WORDS[paper.kind]}
         <div className="text-second text-quiet">
           {momentWords(new Date(paper.sentAt), clock)}, {paper.sentBy}
         </div>

@@ -6,7 +6,13 @@ import { BottomActions } from '@/components/shell/portal-shell';
 import { Button } from '@/components/ui/button';
 import { Edge } from '@/components/ui/edge';
 import { momentWords, shortDayWords, type Clock } from '@/lib/day-words';
-import { acknowledgeBatch, getPortalBatch, markDone, shipBatch, type PortalBatch as Batch } from '@/lib/portal/contract';
+import {
+  acknowledgeBatch,
+  getPortalBatch,
+  markDone,
+  shipBatch,
+  type PortalBatch as Batch,
+} from '@/lib/portal/contract';
 
 import { AnswerState } from './answer-state';
 import { AskButton } from './ask-button';
@@ -30,7 +36,8 @@ export function PortalBatch({ batchId, now }: { batchId: string; now: string }) 
       <BatchTitle batch={batch} clock={clock} />
       {batch.cancelledAt !== null && <Cancelled batch={batch} clock={clock} />}
       <AskedLines batch={batch} clock={clock} folded={!isFirst && batch.cancelledAt === null} />
-      {batch.cancelledAt === null && (isFirst ? <FirstAnswer batch={batch} clock={clock} /> : <UnderWay batch={batch} clock={clock} />)}
+      {batch.cancelledAt === null &&
+        (isFirst ? <FirstAnswer batch={batch} clock={clock} /> : <UnderWay batch={batch} clock={clock} />)}
       <PortalMessages batchId={batchId} clock={clock} />
     </>
   );
@@ -40,7 +47,8 @@ function Cancelled({ batch: { shop, cancelledAt }, clock }: { batch: Batch; cloc
   return (
     <Edge level="stop">
       <strong>{shop.name} has cancelled this batch</strong>
-      {cancelledAt !== null && `, ${momentWords(new Date(cancelledAt), clock)}`}. Do not work on it; its pieces go back as they are.
+      {cancelledAt !== null && `, ${momentWords(new Date(cancelledAt), clock)}`}. Do not work on it; its
+      pieces go back as they are.
     </Edge>
   );
 }
@@ -54,7 +62,14 @@ function UnderWay({ batch, clock }: { batch: Batch; clock: Clock }) {
       <HaveStep batch={batch} clock={clock} />
       <PromiseStep batch={batch} clock={clock} />
       <PapersStep batch={batch} clock={clock} />
-      <ShipStep batch={batch} clock={clock} shipping={shipping} onShipping={setShipping} ship={ship} done={done} />
+      <ShipStep
+        batch={batch}
+        clock={clock}
+        shipping={shipping}
+        onShipping={setShipping}
+        ship={ship}
+        done={done}
+      />
       <BottomActions>
         <AskButton />
         <NextAnswer batch={batch} shipping={shipping} ship={ship} done={done} />
@@ -71,13 +86,18 @@ function HaveStep({ batch, clock }: { batch: Batch; clock: Clock }) {
     <Step
       number={1}
       state={onTheWay > 0 ? 'late' : 'done'}
-      title={onTheWay > 0 ? `You have ${had} of ${batch.pieces} pieces` : `${hereOf(batch) > 0 ? 'You have' : 'You had'} ${had || batch.pieces} pieces`}
+      title={
+        onTheWay > 0
+          ? `You have ${had} of ${batch.pieces} pieces`
+          : `${hereOf(batch) > 0 ? 'You have' : 'You had'} ${had || batch.pieces} pieces`
+      }
       aside={batch.acknowledgedAt === null ? null : shortDayWords(new Date(batch.acknowledgedAt), clock)}
     >
       {onTheWay > 0 && (
         <>
           <p className="pb-2">
-            <strong className="num">{onTheWay}</strong> {onTheWay === 1 ? 'has' : 'have'} not come. {batch.shop.name} is told.
+            <strong className="num">{onTheWay}</strong> {onTheWay === 1 ? 'has' : 'have'} not come.{' '}
+            {batch.shop.name} is told.
           </p>
           <Button busy={rest.sending} busyLabel="Sending" onClick={() => rest.give({ batchId: batch.id })}>
             {onTheWay === 1 ? 'It has come now' : `The ${onTheWay} have come now`}
@@ -101,7 +121,15 @@ function NextAnswer({ batch, shipping, ship, done }: NextAnswerProps) {
   const here = hereOf(batch);
   if (here > 0 && batch.markedDoneAt === null) {
     return (
-      <Button look="primary" size="big" busy={done.sending} busyLabel="Sending" notNow={done.waiting && 'It waits for the network.'} reasonAt="elsewhere" onClick={() => done.give({ batchId: batch.id })}>
+      <Button
+        look="primary"
+        size="big"
+        busy={done.sending}
+        busyLabel="Sending"
+        notNow={done.waiting && 'It waits for the network.'}
+        reasonAt="elsewhere"
+        onClick={() => done.give({ batchId: batch.id })}
+      >
         {here === 1 ? 'It is done' : `The ${here.toLocaleString('en-US')} are done`}
       </Button>
     );
@@ -110,15 +138,31 @@ function NextAnswer({ batch, shipping, ship, done }: NextAnswerProps) {
     const shipment = shipmentOf(batch, shipping);
     const notNow = 'notYet' in shipment ? shipment.notYet : ship.waiting && 'It waits for the network.';
     return (
-      <Button look="primary" size="big" busy={ship.sending} busyLabel="Sending" notNow={notNow} reasonAt="below" onClick={() => ('input' in shipment ? ship.give(shipment.input) : undefined)}>
+      <Button
+        look="primary"
+        size="big"
+        busy={ship.sending}
+        busyLabel="Sending"
+        notNow={notNow}
+        reasonAt="below"
+        onClick={() => ('input' in shipment ? ship.give(shipment.input) : undefined)}
+      >
         {'total' in shipment ? `${shipment.total.toLocaleString('en-US')} shipped` : 'Shipped'}
       </Button>
     );
   }
-  const wanted = (['certificate', 'invoice'] as const).find((kind) => !batch.papers.some((paper) => paper.kind === kind && !['set_aside', 'refused'].includes(paper.state)));
-  if (wanted === undefined) return <p className="flex items-center text-quiet">Nothing more is wanted from you.</p>;
+  const wanted = (['certificate', 'invoice'] as const).find(
+    (kind) =>
+      !batch.papers.some((paper) => paper.kind === kind && !['set_aside', 'refused'].includes(paper.state)),
+  );
+  if (wanted === undefined)
+    return <p className="flex items-center text-quiet">Nothing more is wanted from you.</p>;
   return (
-    <Button look="primary" size="big" onClick={() => document.getElementById('papers')?.scrollIntoView({ block: 'start' })}>
+    <Button
+      look="primary"
+      size="big"
+      onClick={() => document.getElementById('papers')?.scrollIntoView({ block: 'start' })}
+    >
       Send the {wanted}
     </Button>
   );

@@ -31,7 +31,9 @@ export function PortalMessages({ batchId, clock }: { batchId: string; clock: Clo
   return (
     <Section id="messages" title="Questions, answers, trouble" note={thread.other} className="pt-1">
       {thread.messages.length === 0 ? (
-        <p className="text-quiet">Nothing was said yet. What you write goes to {thread.other} as a mail and stays with the batch.</p>
+        <p className="text-quiet">
+          Nothing was said yet. What you write goes to {thread.other} as a mail and stays with the batch.
+        </p>
       ) : (
         <ThreadList thread={thread} clock={clock} mySide="processor" onAnswer={answer} />
       )}
@@ -44,10 +46,29 @@ export function PortalMessages({ batchId, clock }: { batchId: string; clock: Clo
         onNotAnswering={notAnswering}
         error={messageError(write.error ?? trouble.error)}
         onSend={(kind) =>
-          quietly(write.mutateAsync({ batchId, kind, body: draft.body, lineId: answering ? null : lineId, answersId: kind === 'answer' ? (answering?.id ?? null) : null }).then(sent(`Sent to ${thread.other}.`)))
+          quietly(
+            write
+              .mutateAsync({
+                batchId,
+                kind,
+                body: draft.body,
+                lineId: answering ? null : lineId,
+                answersId: kind === 'answer' ? (answering?.id ?? null) : null,
+              })
+              .then(sent(`Sent to ${thread.other}.`)),
+          )
         }
         more={
-          <Button look="stop" onClick={() => quietly(trouble.mutateAsync({ batchId, body: draft.body, lineId }).then(sent(`${thread.other} is told.`)))}>
+          <Button
+            look="stop"
+            onClick={() =>
+              quietly(
+                trouble
+                  .mutateAsync({ batchId, body: draft.body, lineId })
+                  .then(sent(`${thread.other} is told.`)),
+              )
+            }
+          >
             Report trouble
           </Button>
         }

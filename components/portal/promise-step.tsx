@@ -19,7 +19,12 @@ export function PromiseStep({ batch, clock }: { batch: PortalBatch; clock: Clock
   const late = here && batch.promisedOn !== null && daysUntil(batch.promisedOn, clock) < 0;
   const [latest] = batch.promises;
   return (
-    <Step number={2} state={stateOf({ late, promised: batch.promisedOn !== null })} title={<PromiseTitle batch={batch} clock={clock} late={late} />} aside={latest && `${shortDayWords(new Date(latest.madeAt), clock)}, ${latest.madeBy}`}>
+    <Step
+      number={2}
+      state={stateOf({ late, promised: batch.promisedOn !== null })}
+      title={<PromiseTitle batch={batch} clock={clock} late={late} />}
+      aside={latest && `${shortDayWords(new Date(latest.madeAt), clock)}, ${latest.madeBy}`}
+    >
       {away && (
         <form
           noValidate
@@ -37,12 +42,23 @@ export function PromiseStep({ batch, clock }: { batch: PortalBatch; clock: Clock
             hint={day === '' ? undefined : dayWords(day, clock)}
             error={promise.refusal?.problem.fields?.[0]?.message}
           />
-          <Button type="submit" size="big" className="mt-[1.3125rem]" busy={promise.sending} busyLabel="Sending" notNow={day === '' && 'Choose a day first.'} reasonAt="elsewhere">
+          <Button
+            type="submit"
+            size="big"
+            className="mt-[1.3125rem]"
+            busy={promise.sending}
+            busyLabel="Sending"
+            notNow={day === '' && 'Choose a day first.'}
+            reasonAt="elsewhere"
+          >
             Promise
           </Button>
         </form>
       )}
-      <AnswerState answer={promise.refusal?.problem.fields ? { ...promise, refusal: null } : promise} what="The new day" />
+      <AnswerState
+        answer={promise.refusal?.problem.fields ? { ...promise, refusal: null } : promise}
+        what="The new day"
+      />
     </Step>
   );
 }
@@ -52,7 +68,15 @@ function stateOf({ late, promised }: { late: boolean; promised: boolean }): 'ope
   return promised ? 'done' : 'open';
 }
 
-function PromiseTitle({ batch: { promisedOn }, clock, late }: { batch: PortalBatch; clock: Clock; late: boolean }) {
+function PromiseTitle({
+  batch: { promisedOn },
+  clock,
+  late,
+}: {
+  batch: PortalBatch;
+  clock: Clock;
+  late: boolean;
+}) {
   if (promisedOn === null) return <>No day promised yet</>;
   const days = -daysUntil(promisedOn, clock);
   return (

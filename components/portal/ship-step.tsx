@@ -32,19 +32,28 @@ export function ShipStep({ batch, clock, shipping, onShipping, ship, done }: Shi
   const gone = batch.lines.reduce((sum, line) => sum + line.onTheWayBack, 0);
   const isShipped = batch.shippedAt !== null && here === 0;
   return (
-    <Step number={4} state={isShipped ? 'done' : 'open'} title={titleOf(batch, here)} aside={asideOf(batch, clock)}>
-      {batch.shippedNote && <p className="pb-2 text-quiet [overflow-wrap:anywhere]">{batch.shippedNote}</p>}
+    <Step
+      number={4}
+      state={isShipped ? 'done' : 'open'}
+      title={titleOf(batch, here)}
+      aside={asideOf(batch, clock)}
+    >
+      {batch.shippedNote && <p className="pb-2 [overflow-wrap:anywhere] text-quiet">{batch.shippedNote}</p>}
       {gone > 0 && (
         <p className="pb-2">
-          <strong className="num">{gone.toLocaleString('en-US')}</strong> on the way back, not yet counted in by the shop.
+          <strong className="num">{gone.toLocaleString('en-US')}</strong> on the way back, not yet counted in
+          by the shop.
         </p>
       )}
       {batch.piecesBack > 0 && (
         <p className="pb-2">
-          <strong className="num">{batch.piecesBack.toLocaleString('en-US')}</strong> of <span className="num">{batch.pieces.toLocaleString('en-US')}</span> counted in by the shop.
+          <strong className="num">{batch.piecesBack.toLocaleString('en-US')}</strong> of{' '}
+          <span className="num">{batch.pieces.toLocaleString('en-US')}</span> counted in by the shop.
         </p>
       )}
-      {batch.markedDoneAt !== null && here > 0 && <HowShipped batch={batch} shipping={shipping} onShipping={onShipping} />}
+      {batch.markedDoneAt !== null && here > 0 && (
+        <HowShipped batch={batch} shipping={shipping} onShipping={onShipping} />
+      )}
       {batch.markedDoneAt !== null && batch.shippedAt === null && (
         <Button look="word" className="pt-2" onClick={() => done.give({ batchId: batch.id, done: false })}>
           They are not done after all
@@ -60,7 +69,10 @@ export const hereOf = ({ lines }: PortalBatch): number => lines.reduce((sum, lin
 
 function titleOf(batch: PortalBatch, here: number): string {
   if (batch.shippedAt !== null && here === 0) return 'Shipped';
-  if (batch.markedDoneAt !== null) return batch.shippedAt === null ? 'Done, ready to ship' : `${here.toLocaleString('en-US')} still with you`;
+  if (batch.markedDoneAt !== null)
+    return batch.shippedAt === null
+      ? 'Done, ready to ship'
+      : `${here.toLocaleString('en-US')} still with you`;
   return 'Say when they are done and shipped';
 }
 
@@ -69,11 +81,21 @@ function asideOf({ shippedAt, markedDoneAt }: PortalBatch, clock: Clock): string
   return at === null ? null : momentWords(new Date(at), clock);
 }
 
-function HowShipped({ batch, shipping, onShipping }: Pick<ShipStepProps, 'batch' | 'shipping' | 'onShipping'>) {
+function HowShipped({
+  batch,
+  shipping,
+  onShipping,
+}: Pick<ShipStepProps, 'batch' | 'shipping' | 'onShipping'>) {
   const lines = batch.lines.filter((line) => line.here > 0);
   return (
     <div className="flex flex-col gap-3">
-      <TextField label="How they go" hint="Carrier and number, or who brings them. May be left empty." value={shipping.note} maxLength={300} onChange={(event) => onShipping({ ...shipping, note: event.currentTarget.value })} />
+      <TextField
+        label="How they go"
+        hint="Carrier and number, or who brings them. May be left empty."
+        value={shipping.note}
+        maxLength={300}
+        onChange={(event) => onShipping({ ...shipping, note: event.currentTarget.value })}
+      />
       {shipping.lines === null ? (
         // Which named pieces go in a part shipment is settled by counting them in, so they go whole here.
         lines.every((line) => line.serials.length === 0) && (
@@ -84,7 +106,12 @@ function HowShipped({ batch, shipping, onShipping }: Pick<ShipStepProps, 'batch'
       ) : (
         <div role="group" aria-label="How many of each line go" className="flex flex-col gap-3">
           {lines.map((line) => (
-            <LineShipped key={line.id} line={line} typed={shipping.lines?.[line.id]} onType={(typed) => onShipping({ ...shipping, lines: { ...shipping.lines, [line.id]: typed } })} />
+            <LineShipped
+              key={line.id}
+              line={line}
+              typed={shipping.lines?.[line.id]}
+              onType={(typed) => onShipping({ ...shipping, lines: { ...shipping.lines, [line.id]: typed } })}
+            />
           ))}
           <Button look="word" className="self-start" onClick={() => onShipping({ ...shipping, lines: null })}>
             All of them go
@@ -95,7 +122,15 @@ function HowShipped({ batch, shipping, onShipping }: Pick<ShipStepProps, 'batch'
   );
 }
 
-function LineShipped({ line, typed, onType }: { line: PortalLine; typed: string | undefined; onType: (typed: string) => void }) {
+function LineShipped({
+  line,
+  typed,
+  onType,
+}: {
+  line: PortalLine;
+  typed: string | undefined;
+  onType: (typed: string) => void;
+}) {
   return (
     <PieceCounter
       label={
@@ -111,13 +146,24 @@ function LineShipped({ line, typed, onType }: { line: PortalLine; typed: string 
 }
 
 /** What goes, as the server takes it; or what is wrong with it. */
-export function shipmentOf(batch: PortalBatch, { note, lines }: Shipping): { total: number; input: InputOf<typeof shipBatch> } | { notYet: string } {
+export function shipmentOf(
+  batch: PortalBatch,
+  { note, lines }: Shipping,
+): { total: number; input: InputOf<typeof shipBatch> } | { notYet: string } {
   const base = { batchId: batch.id, note };
   if (lines === null) return { total: hereOf(batch), input: base };
-  const counts = batch.lines.filter((line) => line.here > 0).map((line) => ({ line, typed: lines[line.id] ?? String(line.here) }));
-  const wrong = counts.find(({ line, typed }) => !/^\d{1,7}$/.test(typed.trim()) || Number(typed) > line.here);
-  if (wrong) return { notYet: `Line ${wrong.line.lineNo}: enter a whole number, ${wrong.line.here} or less.` };
+  const counts = batch.lines
+    .filter((line) => line.here > 0)
+    .map((line) => ({ line, typed: lines[line.id] ?? String(line.here) }));
+  const wrong = counts.find(
+    ({ line, typed }) => !/^\d{1,7}$/.test(typed.trim()) || Number(typed) > line.here,
+  );
+  if (wrong)
+    return { notYet: `Line ${wrong.line.lineNo}: enter a whole number, ${wrong.line.here} or less.` };
   const total = counts.reduce((sum, { typed }) => sum + Number(typed), 0);
   if (total === 0) return { notYet: 'Count at least 1 piece that goes.' };
-  return { total, input: { ...base, counts: counts.map(({ line, typed }) => ({ lineId: line.id, pieces: Number(typed) })) } };
+  return {
+    total,
+    input: { ...base, counts: counts.map(({ line, typed }) => ({ lineId: line.id, pieces: Number(typed) })) },
+  };
 }

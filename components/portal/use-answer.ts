@@ -17,7 +17,11 @@ interface Waiting<Input> {
  * An answer that survives a lost network: it is kept on this device and sent when the network is back, even after the
  * page was closed. Anything the server refuses is told and no longer kept.
  */
-export function useAnswer<D extends Declaration>(declaration: D, name: string, onSent?: (result: OutputOf<D>) => void) {
+export function useAnswer<D extends Declaration>(
+  declaration: D,
+  name: string,
+  onSent?: (result: OutputOf<D>) => void,
+) {
   const cache = useQueryClient();
   const [waiting, keep] = useKept<Waiting<InputOf<D>>>(`${declaration.id}:${name}`);
   const [refusal, setRefusal] = useState<ApiError | null>(null);
@@ -37,7 +41,11 @@ export function useAnswer<D extends Declaration>(declaration: D, name: string, o
         const result = await call(declaration, answer.input, { key: answer.key });
         keep(null);
         setRefusal(null);
-        await Promise.all([getPortalBatch, listPortalMessages].map((read) => cache.invalidateQueries({ queryKey: [read.id] })));
+        await Promise.all(
+          [getPortalBatch, listPortalMessages].map((read) =>
+            cache.invalidateQueries({ queryKey: [read.id] }),
+          ),
+        );
         tell.current?.(result);
       } catch (error) {
         if (!(error instanceof ApiError)) throw error;

@@ -8,13 +8,23 @@ export interface WorkGroup {
 
 /** The work list in the order of what presses: late, to count, with us by promised day, without a day, away. */
 export function workGroups(rows: readonly PortalRow[], clock: Clock): WorkGroup[] {
-  const groups: Record<GroupName, PortalRow[]> = { late: [], count: [], soon: [], later: [], undated: [], away: [] };
+  const groups: Record<GroupName, PortalRow[]> = {
+    late: [],
+    count: [],
+    soon: [],
+    later: [],
+    undated: [],
+    away: [],
+  };
   for (const row of rows) groups[groupOf(row, clock)].push(row);
-  const byDay = (one: PortalRow, other: PortalRow) => (one.promisedOn ?? '').localeCompare(other.promisedOn ?? '');
+  const byDay = (one: PortalRow, other: PortalRow) =>
+    (one.promisedOn ?? '').localeCompare(other.promisedOn ?? '');
   groups.late.sort(byDay);
   groups.soon.sort(byDay);
   groups.later.sort(byDay);
-  return (Object.keys(WORDS) as GroupName[]).map((name) => ({ says: WORDS[name], rows: groups[name] })).filter((group) => group.rows.length > 0);
+  return (Object.keys(WORDS) as GroupName[])
+    .map((name) => ({ says: WORDS[name], rows: groups[name] }))
+    .filter((group) => group.rows.length > 0);
 }
 
 const WORDS = {
@@ -29,11 +39,13 @@ type GroupName = keyof typeof WORDS;
 
 const SOON_DAYS = 14;
 
-export const isAway = (row: PortalRow): boolean => ['returned', 'proved', 'held'].includes(row.stage) && row.piecesBack >= row.pieces;
+export const isAway = (row: PortalRow): boolean =>
+  ['returned', 'proved', 'held'].includes(row.stage) && row.piecesBack >= row.pieces;
 
 function groupOf(row: PortalRow, clock: Clock): GroupName {
   if (isAway(row)) return 'away';
-  if (row.promisedOn !== null && daysUntil(row.promisedOn, clock) < 0 && row.shippedAt === null) return 'late';
+  if (row.promisedOn !== null && daysUntil(row.promisedOn, clock) < 0 && row.shippedAt === null)
+    return 'late';
   if (row.acknowledgedAt === null && row.piecesBack === 0) return 'count';
   if (row.shippedAt !== null) return 'away';
   if (row.promisedOn === null) return 'undated';
@@ -45,7 +57,8 @@ export function openOf(row: PortalRow): { says: string; verb: string } {
   if (row.asksMe) return { says: 'the shop asks', verb: 'Answer' };
   if (row.acknowledgedAt === null && row.piecesBack === 0) return { says: '', verb: 'Count' };
   if (row.answered) return { says: 'question answered', verb: 'Read' };
-  if (row.certificates === 0) return { says: row.shippedAt === null && !isAway(row) ? '' : 'certificate wanted', verb: 'Send papers' };
+  if (row.certificates === 0)
+    return { says: row.shippedAt === null && !isAway(row) ? '' : 'certificate wanted', verb: 'Send papers' };
   if (row.invoices === 0) return { says: 'invoice wanted', verb: 'Send invoice' };
   return { says: '', verb: 'Open' };
 }

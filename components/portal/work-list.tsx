@@ -23,7 +23,18 @@ interface WorkListProps {
   now: string;
 }
 
-const COLUMNS = [{ says: 'Batch' }, { says: 'Shop' }, { says: 'Pieces', right: true }, { says: 'Parts' }, { says: 'Material' }, { says: 'Asked' }, { says: 'Thickness' }, { says: 'Promised' }, { says: 'Open', hidden: true }, { says: 'Go', hidden: true }];
+const COLUMNS = [
+  { says: 'Batch' },
+  { says: 'Shop' },
+  { says: 'Pieces', right: true },
+  { says: 'Parts' },
+  { says: 'Material' },
+  { says: 'Asked' },
+  { says: 'Thickness' },
+  { says: 'Promised' },
+  { says: 'Open', hidden: true },
+  { says: 'Go', hidden: true },
+];
 
 /** All work of the processor, for all its shops, worst first. */
 export function WorkList({ shopId, show, now }: WorkListProps) {
@@ -34,7 +45,11 @@ export function WorkList({ shopId, show, now }: WorkListProps) {
   const rows = shopId === undefined ? all : all.filter((row) => row.shopId === shopId);
   return (
     <>
-      <PageHead title="Work" sub={<Summary rows={rows} show={show} clock={clock} />} actions={<Filters all={all} shopId={shopId} show={show} />} />
+      <PageHead
+        title="Work"
+        sub={<Summary rows={rows} show={show} clock={clock} />}
+        actions={<Filters all={all} shopId={shopId} show={show} />}
+      />
       {rows.length === 0 ? <Nothing show={show} /> : <WorkTable rows={rows} show={show} clock={clock} />}
       {earlier.next !== null && (
         <div className="py-4">
@@ -67,21 +82,48 @@ function useEarlier(show: WorkListProps['show'], first: string | null) {
   return { rows: loaded?.rows ?? [], next, load, failed };
 }
 
-function Summary({ rows, show, clock }: { rows: readonly PortalRow[]; show: WorkListProps['show']; clock: Clock }) {
+function Summary({
+  rows,
+  show,
+  clock,
+}: {
+  rows: readonly PortalRow[];
+  show: WorkListProps['show'];
+  clock: Clock;
+}) {
   const shops = new Set(rows.map((row) => row.shopId)).size;
-  const late = rows.filter((row) => show === 'open' && row.shippedAt === null && row.promisedOn !== null && daysUntil(row.promisedOn, clock) < 0 && row.piecesBack < row.pieces).length;
+  const late = rows.filter(
+    (row) =>
+      show === 'open' &&
+      row.shippedAt === null &&
+      row.promisedOn !== null &&
+      daysUntil(row.promisedOn, clock) < 0 &&
+      row.piecesBack < row.pieces,
+  ).length;
   const toCount = rows.filter((row) => row.acknowledgedAt === null && row.piecesBack === 0).length;
   return (
     <>
-      {rows.length} {rows.length === 1 ? 'batch' : 'batches'} from {shops} {shops === 1 ? 'shop' : 'shops'}.{late > 0 && <strong className="text-held-ink"> {late} late.</strong>}
+      {rows.length} {rows.length === 1 ? 'batch' : 'batches'} from {shops} {shops === 1 ? 'shop' : 'shops'}.
+      {late > 0 && <strong className="text-held-ink"> {late} late.</strong>}
       {show === 'open' && toCount > 0 && <> {toCount} to acknowledge.</>}
     </>
   );
 }
 
-function Filters({ all, shopId, show }: { all: readonly PortalRow[]; shopId: string | undefined; show: WorkListProps['show'] }) {
-  const shops = [...new Map(all.map((row) => [row.shopId, row.shop]))].sort((one, other) => one[1].localeCompare(other[1]));
-  const href = (query: Record<string, string>) => `/portal${Object.keys(query).length > 0 ? `?${new URLSearchParams(query)}` : ''}`;
+function Filters({
+  all,
+  shopId,
+  show,
+}: {
+  all: readonly PortalRow[];
+  shopId: string | undefined;
+  show: WorkListProps['show'];
+}) {
+  const shops = [...new Map(all.map((row) => [row.shopId, row.shop]))].sort((one, other) =>
+    one[1].localeCompare(other[1]),
+  );
+  const href = (query: Record<string, string>) =>
+    `/portal${Object.keys(query).length > 0 ? `?${new URLSearchParams(query)}` : ''}`;
   const shown: Record<string, string> = show === 'finished' ? { show } : {};
   return (
     <>
@@ -90,7 +132,12 @@ function Filters({ all, shopId, show }: { all: readonly PortalRow[]; shopId: str
           label="Shop"
           items={[
             { says: 'All shops', current: shopId === undefined, href: href(shown) },
-            ...shops.map(([id, name]) => ({ says: name, count: all.filter((row) => row.shopId === id).length, current: id === shopId, href: href({ ...shown, shop: id }) })),
+            ...shops.map(([id, name]) => ({
+              says: name,
+              count: all.filter((row) => row.shopId === id).length,
+              current: id === shopId,
+              href: href({ ...shown, shop: id }),
+            })),
           ]}
         />
       )}
@@ -106,15 +153,38 @@ function Filters({ all, shopId, show }: { all: readonly PortalRow[]; shopId: str
 }
 
 function Nothing({ show }: { show: WorkListProps['show'] }) {
-  if (show === 'finished') return <Empty says="Nothing is finished yet." comes="A batch comes here when its papers are accepted and its invoice is paid." />;
-  return <Empty says="No batch is on its way to you or with you." comes="A batch comes here when a shop dispatches it; you get a mail at the same time." />;
+  if (show === 'finished')
+    return (
+      <Empty
+        says="Nothing is finished yet."
+        comes="A batch comes here when its papers are accepted and its invoice is paid."
+      />
+    );
+  return (
+    <Empty
+      says="No batch is on its way to you or with you."
+      comes="A batch comes here when a shop dispatches it; you get a mail at the same time."
+    />
+  );
 }
 
-function WorkTable({ rows, show, clock }: { rows: readonly PortalRow[]; show: WorkListProps['show']; clock: Clock }) {
-  const groups = show === 'open' ? workGroups(rows, clock) : [{ says: 'Finished, newest first', rows: [...rows] }];
+function WorkTable({
+  rows,
+  show,
+  clock,
+}: {
+  rows: readonly PortalRow[];
+  show: WorkListProps['show'];
+  clock: Clock;
+}) {
+  const groups =
+    show === 'open' ? workGroups(rows, clock) : [{ says: 'Finished, newest first', rows: [...rows] }];
   return (
     <Table label="Work" columns={COLUMNS}>
-      {groups.flatMap((group) => [<GroupRow key={group.says} says={group.says} count={group.rows.length} span={COLUMNS.length} />, ...group.rows.map((row) => <WorkRow key={row.id} row={row} clock={clock} open={show === 'open'} />)])}
+      {groups.flatMap((group) => [
+        <GroupRow key={group.says} says={group.says} count={group.rows.length} span={COLUMNS.length} />,
+        ...group.rows.map((row) => <WorkRow key={row.id} row={row} clock={clock} open={show === 'open'} />),
+      ])}
     </Table>
   );
 }
@@ -145,7 +215,11 @@ function WorkRow({ row, clock, open }: { row: PortalRow; clock: Clock; open: boo
       <Cell quiet>{open && todo.says}</Cell>
       <Cell right>
         {open && (
-          <Link href={todo.verb === 'Answer' || todo.verb === 'Read' ? `${href}#messages` : href} className="lw-word-button whitespace-nowrap" aria-label={`${todo.verb} ${row.number}`}>
+          <Link
+            href={todo.verb === 'Answer' || todo.verb === 'Read' ? `${href}#messages` : href}
+            className="lw-word-button whitespace-nowrap"
+            aria-label={`${todo.verb} ${row.number}`}
+          >
             {todo.verb}
           </Link>
         )}
@@ -155,16 +229,24 @@ function WorkRow({ row, clock, open }: { row: PortalRow; clock: Clock; open: boo
 }
 
 function Promised({ row, clock, open }: { row: PortalRow; clock: Clock; open: boolean }) {
-  if (row.lastBackAt !== null && row.piecesBack >= row.pieces) return <span className="text-quiet">back {shortDayWords(new Date(row.lastBackAt), clock)}</span>;
-  if (row.shippedAt !== null) return <span className="text-quiet">shipped {shortDayWords(new Date(row.shippedAt), clock)}</span>;
+  if (row.lastBackAt !== null && row.piecesBack >= row.pieces)
+    return <span className="text-quiet">back {shortDayWords(new Date(row.lastBackAt), clock)}</span>;
+  if (row.shippedAt !== null)
+    return <span className="text-quiet">shipped {shortDayWords(new Date(row.shippedAt), clock)}</span>;
   if (row.promisedOn !== null && open) {
     return (
       <span className="whitespace-nowrap">
-        <Until day={row.promisedOn} clock={clock} /> <span className="text-quiet">{shortDayWords(row.promisedOn, clock)}</span>
+        <Until day={row.promisedOn} clock={clock} />{' '}
+        <span className="text-quiet">{shortDayWords(row.promisedOn, clock)}</span>
       </span>
     );
   }
-  return <span className="text-quiet">{row.wantedBackOn === null ? 'no day asked' : `asked ${shortDayWords(row.wantedBackOn, clock)}`}</span>;
+  return (
+    <span className="text-quiet">
+      {row.wantedBackOn === null ? 'no day asked' : `asked ${shortDayWords(row.wantedBackOn, clock)}`}
+    </span>
+  );
 }
 
-const someOf = (words: readonly string[]): string => (words.length <= 2 ? words.join(', ') : `${words.slice(0, 2).join(', ')} and ${words.length - 2} more`);
+const someOf = (words: readonly string[]): string =>
+  words.length <= 2 ? words.join(', ') : `${words.slice(0, 2).join(', ')} and ${words.length - 2} more`;

@@ -16,7 +16,10 @@ import { PROCESS_WORDS } from '@/lib/trade/process';
 /** Everything that ever went there, newest first. */
 export function ProcessorBatches({ processorId, now }: { processorId: string; now: Date }) {
   const { zone } = useClock();
-  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listBatches, { processorId, limit: 20 });
+  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listBatches, {
+    processorId,
+    limit: 20,
+  });
   const rows = data?.pages.flatMap((page) => page.rows) ?? [];
   return (
     <Section title="Batches" note="newest first">
@@ -24,7 +27,17 @@ export function ProcessorBatches({ processorId, now }: { processorId: string; no
       {error && <Failing says="The batches could not be read." again={error.message} />}
       {data && rows.length === 0 && <Empty says="No batch went there yet." />}
       {rows.length > 0 && (
-        <Table label="Batches" columns={[{ says: 'Batch' }, { says: 'Order' }, { says: 'Process' }, { says: 'Pieces', right: true }, { says: 'Out' }, { says: 'Promised' }]}>
+        <Table
+          label="Batches"
+          columns={[
+            { says: 'Batch' },
+            { says: 'Order' },
+            { says: 'Process' },
+            { says: 'Pieces', right: true },
+            { says: 'Out' },
+            { says: 'Promised' },
+          ]}
+        >
           {rows.map((row) => (
             <BatchLine key={row.id} row={row} clock={{ zone, now }} />
           ))}
@@ -32,7 +45,11 @@ export function ProcessorBatches({ processorId, now }: { processorId: string; no
       )}
       {hasNextPage && (
         <div className="pt-3">
-          <Button size="small" busy={isFetchingNextPage} onClick={() => fetchNextPage().then(() => undefined)}>
+          <Button
+            size="small"
+            busy={isFetchingNextPage}
+            onClick={() => fetchNextPage().then(() => undefined)}
+          >
             Older batches
           </Button>
         </div>
@@ -54,8 +71,14 @@ function BatchLine({ row, clock }: { row: BatchRow; clock: Clock }) {
       <Cell figure head="Pieces">
         {row.pieces}
       </Cell>
-      <Cell head="Out">{row.dispatchedAt !== null && <Day day={calendarDay(new Date(row.dispatchedAt), clock.zone)} clock={clock} short />}</Cell>
-      <Cell head="Promised">{row.promisedOn !== null && <Day day={row.promisedOn} clock={clock} short />}</Cell>
+      <Cell head="Out">
+        {row.dispatchedAt !== null && (
+          <Day day={calendarDay(new Date(row.dispatchedAt), clock.zone)} clock={clock} short />
+        )}
+      </Cell>
+      <Cell head="Promised">
+        {row.promisedOn !== null && <Day day={row.promisedOn} clock={clock} short />}
+      </Cell>
     </Row>
   );
 }

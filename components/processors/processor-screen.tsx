@@ -20,7 +20,11 @@ export function ProcessorScreen({ processorId, now }: { processorId: string; now
   const mayEdit = useMay('processor.edit');
   return (
     <>
-      <PageHead title={processor.name} sub={processor.active ? undefined : 'No longer used by this shop.'} cells={<TitleCells cells={cellsOf(processor)} />} />
+      <PageHead
+        title={processor.name}
+        sub={processor.active ? undefined : 'No longer used by this shop.'}
+        cells={<TitleCells cells={cellsOf(processor)} />}
+      />
       <MainAndSide
         main={
           <>
@@ -47,7 +51,9 @@ export function ProcessorScreen({ processorId, now }: { processorId: string; now
 function cellsOf({ phone, email, address, zone, payoutsReady }: Processor) {
   return [
     { caption: 'Desk', value: email },
-    ...(phone === null ? [] : [{ caption: 'Telephone', value: <a href={`tel:${phone.replaceAll(/[^+\d]/g, '')}`}>{phone}</a> }]),
+    ...(phone === null
+      ? []
+      : [{ caption: 'Telephone', value: <a href={`tel:${phone.replaceAll(/[^+\d]/g, '')}`}>{phone}</a> }]),
     ...(address.length === 0 ? [] : [{ caption: 'Address', value: address.join(', ') }]),
     { caption: 'Its time', value: zone.replaceAll('_', ' ') },
     { caption: 'Payments', value: payoutsReady ? 'can be paid here' : 'no account for payments yet' },
@@ -78,10 +84,19 @@ function Contact({ processor, mayEdit }: { processor: Processor; mayEdit: boolea
 function OwnAccount({ processor, mayEdit }: { processor: Processor; mayEdit: boolean }) {
   const write = useWrite(inviteProcessor);
   const { processorId, email } = processor;
-  const invite = () => write.mutate({ processorId }, { onSuccess: () => showMessage({ says: `The invitation is on its way to ${email}.` }), onError: (error) => showMessage({ says: error.message, failed: true }) });
+  const invite = () =>
+    write.mutate(
+      { processorId },
+      {
+        onSuccess: () => showMessage({ says: `The invitation is on its way to ${email}.` }),
+        onError: (error) => showMessage({ says: error.message, failed: true }),
+      },
+    );
   return (
     <div className="flex flex-col gap-2 pt-1">
-      <p className="text-quiet">No account is needed to answer: the link in each dispatch mail opens that batch.</p>
+      <p className="text-quiet">
+        No account is needed to answer: the link in each dispatch mail opens that batch.
+      </p>
       {mayEdit && (
         <div>
           <Button size="small" busy={write.isPending} busyLabel="Inviting" onClick={invite}>

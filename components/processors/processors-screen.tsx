@@ -18,25 +18,59 @@ import { listProcessors, type ProcessorRow } from '@/lib/processors/contract';
 const ENDS_SOON_DAYS = 30;
 
 export function ProcessorsScreen() {
-  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listProcessors, {});
+  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(
+    listProcessors,
+    {},
+  );
   const mayEdit = useMay('processor.edit');
   const clock = useClock();
   return (
     <>
-      <PageHead title="Processors" sub="Whom the shop sends parts to, for what, and until when." actions={mayEdit && <ButtonLink href="/processors/new" look="primary">Add a processor</ButtonLink>} />
+      <PageHead
+        title="Processors"
+        sub="Whom the shop sends parts to, for what, and until when."
+        actions={
+          mayEdit && (
+            <ButtonLink href="/processors/new" look="primary">
+              Add a processor
+            </ButtonLink>
+          )
+        }
+      />
       {isPending && <Loading />}
       {error && <Failing says="The processors could not be read." again={error.message} />}
-      {data && data.pages[0]?.rows.length === 0 && <Empty says="No processor yet." comes="A processor comes here when somebody adds it with its e-mail." />}
+      {data && data.pages[0]?.rows.length === 0 && (
+        <Empty
+          says="No processor yet."
+          comes="A processor comes here when somebody adds it with its e-mail."
+        />
+      )}
       {data && data.pages[0]?.rows.length !== 0 && (
-        <Table label="Processors" columns={[{ says: 'Processor', sorted: 'up' }, { says: 'Contact' }, { says: 'Approved today for' }, { says: 'First end' }, { says: 'Batches', right: true }, { says: 'Pieces out', right: true }]}>
-          {data.pages.flatMap((page) => page.rows).map((row) => (
-            <ProcessorLine key={row.processorId} row={row} clock={clock} />
-          ))}
+        <Table
+          label="Processors"
+          columns={[
+            { says: 'Processor', sorted: 'up' },
+            { says: 'Contact' },
+            { says: 'Approved today for' },
+            { says: 'First end' },
+            { says: 'Batches', right: true },
+            { says: 'Pieces out', right: true },
+          ]}
+        >
+          {data.pages
+            .flatMap((page) => page.rows)
+            .map((row) => (
+              <ProcessorLine key={row.processorId} row={row} clock={clock} />
+            ))}
         </Table>
       )}
       {hasNextPage && (
         <div className="pt-3">
-          <Button size="small" busy={isFetchingNextPage} onClick={() => fetchNextPage().then(() => undefined)}>
+          <Button
+            size="small"
+            busy={isFetchingNextPage}
+            onClick={() => fetchNextPage().then(() => undefined)}
+          >
             More processors
           </Button>
         </div>
@@ -55,8 +89,16 @@ function ProcessorLine({ row, clock }: { row: ProcessorRow; clock: Clock }) {
       <Cell head="Contact">
         {row.contactName} <span className="text-quiet">{row.contactEmail}</span>
       </Cell>
-      <Cell head="Approved today for">{row.processes.length === 0 ? <span className="text-held-ink">nothing</span> : row.processes.map((process) => PROCESS_WORDS[process]).join(', ')}</Cell>
-      <Cell head="First end" className="whitespace-nowrap">{row.approvalEndsOn !== null && <ApprovalEnd day={row.approvalEndsOn} clock={clock} />}</Cell>
+      <Cell head="Approved today for">
+        {row.processes.length === 0 ? (
+          <span className="text-held-ink">nothing</span>
+        ) : (
+          row.processes.map((process) => PROCESS_WORDS[process]).join(', ')
+        )}
+      </Cell>
+      <Cell head="First end" className="whitespace-nowrap">
+        {row.approvalEndsOn !== null && <ApprovalEnd day={row.approvalEndsOn} clock={clock} />}
+      </Cell>
       <Cell figure head="Batches">
         {row.openBatches || ''}
       </Cell>

@@ -27,7 +27,15 @@ export type CountFormOut = z.output<typeof CountForm>;
 
 export const emptyCount = (lines: readonly ReceivingLine[]): CountFormIn => ({
   note: '',
-  lines: lines.map((line) => ({ lineId: line.id, good: '0', damaged: '0', short: '0', over: '0', note: '', named: Object.fromEntries(line.awayPieces.map((piece) => [piece.id, ''])) })),
+  lines: lines.map((line) => ({
+    lineId: line.id,
+    good: '0',
+    damaged: '0',
+    short: '0',
+    over: '0',
+    note: '',
+    named: Object.fromEntries(line.awayPieces.map((piece) => [piece.id, ''])),
+  })),
 });
 
 interface Adding {
@@ -46,7 +54,13 @@ export function countOf(form: CountFormOut, { batchId, lines, photos }: Adding):
       if (!lines.find((line) => line.id === count.lineId)?.serialised) return count;
       const ids = (as: string) => Object.keys(named).filter((id) => named[id] === as);
       const [goodPieceIds, damagedPieceIds] = [ids('good'), ids('damaged')];
-      return { ...count, good: goodPieceIds.length, damaged: damagedPieceIds.length, goodPieceIds, damagedPieceIds };
+      return {
+        ...count,
+        good: goodPieceIds.length,
+        damaged: damagedPieceIds.length,
+        goodPieceIds,
+        damagedPieceIds,
+      };
     }),
   };
 }
@@ -60,9 +74,12 @@ interface Sums {
 
 /** What is counted so far, for the button; what is not yet a number counts as none. */
 export function sumsOf(lines: CountFormIn['lines']): Sums {
-  const read = (typed: unknown) => (typeof typed === 'string' && /^\d+$/.test(typed.trim()) ? Number(typed) : 0);
-  const named = (line: CountFormIn['lines'][number], as: string) => Object.values(line.named).filter((one) => one === as).length;
-  const sum = (of: (line: CountFormIn['lines'][number]) => number) => lines.reduce((all, line) => all + of(line), 0);
+  const read = (typed: unknown) =>
+    typeof typed === 'string' && /^\d+$/.test(typed.trim()) ? Number(typed) : 0;
+  const named = (line: CountFormIn['lines'][number], as: string) =>
+    Object.values(line.named).filter((one) => one === as).length;
+  const sum = (of: (line: CountFormIn['lines'][number]) => number) =>
+    lines.reduce((all, line) => all + of(line), 0);
   return {
     good: sum((line) => read(line.good) + named(line, 'good')),
     damaged: sum((line) => read(line.damaged) + named(line, 'damaged')),

@@ -35,15 +35,40 @@ export function CountScreen({ batchId }: { batchId: string }) {
     { caption: 'Order', value: <span className="num">{batch.orderNumber}</span> },
     { caption: 'Process', value: PROCESS_WORDS[batch.process] },
     { caption: 'Back so far', value: <Pieces count={batch.piecesBack} of={batch.pieces} /> },
-    ...(batch.shippedAt ? [{ caption: 'Said to be on its way', value: <Moment at={new Date(batch.shippedAt)} clock={clock} /> }] : []),
+    ...(batch.shippedAt
+      ? [{ caption: 'Said to be on its way', value: <Moment at={new Date(batch.shippedAt)} clock={clock} /> }]
+      : []),
   ];
   return (
     <>
       <h1 className="sr-only">Count in {batch.number}</h1>
-      <PageHead tag={<BatchTag stage={batch.stage} number={batch.number} size="head" href={`/batches/${batch.id}`} />} cells={<TitleCells cells={cells} />} />
+      <PageHead
+        tag={<BatchTag stage={batch.stage} number={batch.number} size="head" href={`/batches/${batch.id}`} />}
+        cells={<TitleCells cells={cells} />}
+      />
       {batch.shippedNote && <p className="pb-2">The processor says: {batch.shippedNote}</p>}
-      {batch.dispatchedAt === null && <Empty says={`${batch.number} has not left yet.`} comes="Nothing of it can come back." action={<ButtonLink look="word" href={`/batches/${batch.id}`}>To the batch</ButtonLink>} />}
-      {batch.dispatchedAt !== null && away === 0 && <Empty says="All of it is back." comes="Nothing is left to count; what is found over can still be noted." action={<ButtonLink look="word" href={`/batches/${batch.id}`}>To the batch</ButtonLink>} />}
+      {batch.dispatchedAt === null && (
+        <Empty
+          says={`${batch.number} has not left yet.`}
+          comes="Nothing of it can come back."
+          action={
+            <ButtonLink look="word" href={`/batches/${batch.id}`}>
+              To the batch
+            </ButtonLink>
+          }
+        />
+      )}
+      {batch.dispatchedAt !== null && away === 0 && (
+        <Empty
+          says="All of it is back."
+          comes="Nothing is left to count; what is found over can still be noted."
+          action={
+            <ButtonLink look="word" href={`/batches/${batch.id}`}>
+              To the batch
+            </ButtonLink>
+          }
+        />
+      )}
       {batch.dispatchedAt !== null && mayCount && <Counting key={data.receipts} batchId={batchId} />}
       {!mayCount && <p className="text-quiet">Leads and inspectors count in.</p>}
     </>
@@ -54,13 +79,21 @@ function Counting({ batchId }: { batchId: string }) {
   const router = useRouter();
   const { batch, lines } = useRead(getReceiving, { batchId }).data;
   const [photos, setPhotos] = useState<readonly string[]>([]);
-  const form = useForm<CountFormIn, unknown, CountFormOut>({ resolver: zodResolver(CountForm), defaultValues: emptyCount(lines) });
+  const form = useForm<CountFormIn, unknown, CountFormOut>({
+    resolver: zodResolver(CountForm),
+    defaultValues: emptyCount(lines),
+  });
   const write = useWrite(countIn, { refreshes: [getReceiving, listReceipts] });
   const sums = sumsOf(useWatch({ control: form.control, name: 'lines' }));
   const submit = form.handleSubmit(async (values) => {
-    const done = await write.mutateAsync(countOf(values, { batchId, lines, photos }), { onError: showOnForm(form) }).catch(() => null);
+    const done = await write
+      .mutateAsync(countOf(values, { batchId, lines, photos }), { onError: showOnForm(form) })
+      .catch(() => null);
     if (!done) return;
-    const held = done.nonconformances.length > 0 ? ` ${done.nonconformances.map((one) => one.number).join(', ')} opened.` : '';
+    const held =
+      done.nonconformances.length > 0
+        ? ` ${done.nonconformances.map((one) => one.number).join(', ')} opened.`
+        : '';
     showMessage({ says: `${done.good} counted in.${held}` });
     router.push(`/batches/${batch.id}`);
   });
@@ -72,15 +105,34 @@ function Counting({ batchId }: { batchId: string }) {
           <LineCounters key={line.id} line={line} at={at} />
         ))}
         <div className="grid grid-cols-1 gap-x-gutter gap-y-4 border-t-heavy border-ink pt-4 md:grid-cols-2">
-          <FileUpload purpose="photo" batchId={batchId} label="Photos" hint="Of the packing, of damage, of a label" multiple camera onArrived={(file) => setPhotos((now) => [...now, file.id])} onRemoved={(file) => setPhotos((now) => now.filter((id) => id !== file.id))} />
+          <FileUpload
+            purpose="photo"
+            batchId={batchId}
+            label="Photos"
+            hint="Of the packing, of damage, of a label"
+            multiple
+            camera
+            onArrived={(file) => setPhotos((now) => [...now, file.id])}
+            onRemoved={(file) => setPhotos((now) => now.filter((id) => id !== file.id))}
+          />
           <TextArea label="Note" rows={2} maxLength={500} {...form.register('note')} />
         </div>
         <div className="sticky bottom-0 z-10 mt-4 flex flex-wrap items-center gap-x-6 gap-y-2 border-t-heavy border-ink bg-paper py-3 max-md:bottom-[60px]">
-          <Button look="primary" size="big" type="submit" busy={isSubmitting} busyLabel="Counting in" className="max-md:w-full">
+          <Button
+            look="primary"
+            size="big"
+            type="submit"
+            busy={isSubmitting}
+            busyLabel="Counting in"
+            className="max-md:w-full"
+          >
             Count in {sums.good + sums.damaged}
           </Button>
           <p className="text-second" aria-live="polite">
-            <strong className="num">{sums.good}</strong> good, <strong className={`num ${sums.damaged > 0 ? 'text-held-ink' : ''}`}>{sums.damaged}</strong> damaged, <strong className={`num ${sums.short > 0 ? 'text-held-ink' : ''}`}>{sums.short}</strong> short, <strong className="num">{sums.over}</strong> over
+            <strong className="num">{sums.good}</strong> good,{' '}
+            <strong className={`num ${sums.damaged > 0 ? 'text-held-ink' : ''}`}>{sums.damaged}</strong>{' '}
+            damaged, <strong className={`num ${sums.short > 0 ? 'text-held-ink' : ''}`}>{sums.short}</strong>{' '}
+            short, <strong className="num">{sums.over}</strong> over
           </p>
           {errors.root && (
             <p role="alert" className="font-medium text-held-ink">

@@ -22,7 +22,9 @@ export function LineCounters({ line, at }: { line: ReceivingLine; at: number }) 
   const form = useFormContext<CountFormIn, unknown, CountFormOut>();
   const errors = form.formState.errors.lines?.[at];
   const count = useWatch({ control: form.control, name: `lines.${at}` });
-  const asksNote = [count.damaged, count.short, count.over].some((typed) => typed !== '0' && typed !== '') || Object.values(count.named).includes('damaged');
+  const asksNote =
+    [count.damaged, count.short, count.over].some((typed) => typed !== '0' && typed !== '') ||
+    Object.values(count.named).includes('damaged');
   const titleId = `line-${line.id}`;
   const allGood = () => {
     form.setValue(`lines.${at}.good`, String(line.away), { shouldDirty: true });
@@ -54,14 +56,33 @@ export function LineCounters({ line, at }: { line: ReceivingLine; at: number }) 
         )
       )}
       <div className="grid grid-cols-2 gap-x-4 gap-y-3 pt-3 md:grid-cols-4">
-        {COUNTS.filter(({ name }) => !line.serialised || name === 'short' || name === 'over').map(({ name, label }) => (
-          <PieceCounter key={name} {...form.register(`lines.${at}.${name}`)} label={label} min={0} max={1_000_000} error={errors?.[name]?.message} />
-        ))}
+        {COUNTS.filter(({ name }) => !line.serialised || name === 'short' || name === 'over').map(
+          ({ name, label }) => (
+            <PieceCounter
+              key={name}
+              {...form.register(`lines.${at}.${name}`)}
+              label={label}
+              min={0}
+              max={1_000_000}
+              error={errors?.[name]?.message}
+            />
+          ),
+        )}
       </div>
-      {line.serialised && (errors?.good ?? errors?.damaged) && <p role="alert" className="pt-2 font-medium text-held-ink">{errors?.good?.message ?? errors?.damaged?.message}</p>}
+      {line.serialised && (errors?.good ?? errors?.damaged) && (
+        <p role="alert" className="pt-2 font-medium text-held-ink">
+          {errors?.good?.message ?? errors?.damaged?.message}
+        </p>
+      )}
       {asksNote && (
         <div className="max-w-prose pt-3">
-          <TextField label={`What is wrong with line ${line.lineNo}`} hint="Stands on the nonconformance, and in the message about what is over." maxLength={500} error={errors?.note?.message} {...form.register(`lines.${at}.note`)} />
+          <TextField
+            label={`What is wrong with line ${line.lineNo}`}
+            hint="Stands on the nonconformance, and in the message about what is over."
+            maxLength={500}
+            error={errors?.note?.message}
+            {...form.register(`lines.${at}.note`)}
+          />
         </div>
       )}
     </section>

@@ -12,7 +12,15 @@ import { Section } from '@/components/ui/section';
 import { Cell, GroupRow, Row, Table } from '@/components/ui/table';
 import { listReceipts, type ReceiptRow } from '@/lib/receipts/contract';
 
-const COLUMNS = [{ says: 'Line' }, { says: 'Part' }, { says: 'Good', right: true }, { says: 'Damaged', right: true }, { says: 'Short', right: true }, { says: 'Over', right: true }, { says: 'Note' }];
+const COLUMNS = [
+  { says: 'Line' },
+  { says: 'Part' },
+  { says: 'Good', right: true },
+  { says: 'Damaged', right: true },
+  { says: 'Short', right: true },
+  { says: 'Over', right: true },
+  { says: 'Note' },
+];
 
 /** What was counted in of one batch, on its page. */
 export function ReceiptsSection({ batchId }: { batchId: string }) {
@@ -36,7 +44,16 @@ export function ReceiptsSection({ batchId }: { batchId: string }) {
     >
       {isPending && <Loading rows={2} label="Loading receipts" />}
       {error && <Failing says="The receipts could not be read." again={error.message} />}
-      {data && data.receipts.length === 0 && <Empty says="Nothing is back yet." comes={data.dispatched ? 'Each delivery is counted in here, line by line.' : 'It comes back after it has left.'} />}
+      {data && data.receipts.length === 0 && (
+        <Empty
+          says="Nothing is back yet."
+          comes={
+            data.dispatched
+              ? 'Each delivery is counted in here, line by line.'
+              : 'It comes back after it has left.'
+          }
+        />
+      )}
       {data && data.receipts.length > 0 && (
         <Table label="Receipts of this batch" columns={COLUMNS} dense>
           {data.receipts.map((receipt) => (
@@ -62,7 +79,8 @@ function Receipt({ receipt }: { receipt: ReceiptRow }) {
         span={COLUMNS.length}
         says={
           <>
-            <Moment at={new Date(receipt.receivedAt)} clock={clock} /> <span className="font-normal text-quiet">by {receipt.receivedBy}</span>
+            <Moment at={new Date(receipt.receivedAt)} clock={clock} />{' '}
+            <span className="font-normal text-quiet">by {receipt.receivedBy}</span>
           </>
         }
       />

@@ -47,9 +47,24 @@ export function ScanBatch({ asked = '' }: { asked?: string }) {
 
   return (
     <>
-      <PageHead title="Count in" sub="Scan the code of the traveller, or type the number of the batch or the order." />
+      <PageHead
+        title="Count in"
+        sub="Scan the code of the traveller, or type the number of the batch or the order."
+      />
       <form noValidate onSubmit={submit} className="flex max-w-prose flex-wrap items-start gap-2.5">
-        <TextField className="min-w-56 flex-1" label="Number" name="number" defaultValue={asked} mono autoFocus autoComplete="off" autoCapitalize="characters" spellCheck={false} error={refused} onChange={() => setRefused(undefined)} />
+        <TextField
+          className="min-w-56 flex-1"
+          label="Number"
+          name="number"
+          defaultValue={asked}
+          mono
+          autoFocus
+          autoComplete="off"
+          autoCapitalize="characters"
+          spellCheck={false}
+          error={refused}
+          onChange={() => setRefused(undefined)}
+        />
         <span className="flex gap-2 pt-[21px]">
           <Button look="primary" type="submit">
             Open
@@ -76,7 +91,10 @@ function OutNow() {
   return (
     <Section title="Out now" note={rows.length > 0 ? rows.length : undefined} className="pt-6">
       {rows.length === 0 ? (
-        <Empty says="Nothing is out." comes="A batch stands here from its dispatch until all of it is back." />
+        <Empty
+          says="Nothing is out."
+          comes="A batch stands here from its dispatch until all of it is back."
+        />
       ) : (
         <Table label="Batches that are out" columns={COLUMNS}>
           {rows.map((row) => (

@@ -16,7 +16,8 @@ const STATES = [
 export function SerialCounts({ line, at }: { line: ReceivingLine; at: number }) {
   const form = useFormContext<CountFormIn, unknown, CountFormOut>();
   const allGood = () => {
-    for (const piece of line.awayPieces) form.setValue(`lines.${at}.named.${piece.id}`, 'good', { shouldDirty: true });
+    for (const piece of line.awayPieces)
+      form.setValue(`lines.${at}.named.${piece.id}`, 'good', { shouldDirty: true });
   };
   if (line.awayPieces.length === 0) return null;
   return (
@@ -29,12 +30,17 @@ export function SerialCounts({ line, at }: { line: ReceivingLine; at: number }) 
           <li key={piece.id} className="border-b border-rule">
             <fieldset className="flex flex-wrap items-center gap-x-6 max-md:gap-x-3.5">
               <legend className="sr-only">Piece {piece.serial}</legend>
-              <span aria-hidden="true" className="num min-w-28 max-md:min-w-16 font-semibold">
+              <span aria-hidden="true" className="num min-w-28 font-semibold max-md:min-w-16">
                 {piece.serial}
               </span>
               {STATES.map(({ value, says }) => (
                 <label key={says} className="flex min-h-9 items-center gap-2 touch:min-h-12">
-                  <input type="radio" value={value} className="lw-check" {...form.register(`lines.${at}.named.${piece.id}`)} />
+                  <input
+                    type="radio"
+                    value={value}
+                    className="lw-check"
+                    {...form.register(`lines.${at}.named.${piece.id}`)}
+                  />
                   {says}
                 </label>
               ))}

@@ -9,7 +9,13 @@ import { showMessage } from '@/components/ui/message';
 import { PageHead } from '@/components/ui/page-head';
 import { Section } from '@/components/ui/section';
 import { useMe } from '@/components/session/use-me';
-import { endMySessions, getAccount, requestReset, updateAccount, type Account } from '@/lib/people/account-contract';
+import {
+  endMySessions,
+  getAccount,
+  requestReset,
+  updateAccount,
+  type Account,
+} from '@/lib/people/account-contract';
 import { getMe } from '@/lib/session/contract';
 
 import { NameForm } from './name-form';
@@ -41,8 +47,15 @@ export function AccountSections({ signIn, page }: AccountSectionsProps) {
         <NameForm name={account.name} email={account.email} />
       </Section>
       <Choices account={account} />
-      <Section title="Password" note={account.hasPassword ? 'also what you sign certificates with' : 'you sign in by mailed link'}>
-        {account.hasPassword ? <PasswordForm signIn={signIn} page={page} /> : <FirstPassword email={account.email} />}
+      <Section
+        title="Password"
+        note={account.hasPassword ? 'also what you sign certificates with' : 'you sign in by mailed link'}
+      >
+        {account.hasPassword ? (
+          <PasswordForm signIn={signIn} page={page} />
+        ) : (
+          <FirstPassword email={account.email} />
+        )}
       </Section>
       <Sessions />
       {account.organisations.length > 1 && <Organisations account={account} />}
@@ -74,7 +87,12 @@ function Choices({ account }: { account: Account }) {
           chosen={[account.units]}
           onChange={(event) => keep({ units: event.currentTarget.value === 'metric' ? 'metric' : 'inch' })}
         />
-        <Checkbox says="Single keys" note="J, K, G and others; ? lists them. Switch off for speech input." defaultChecked={account.singleKeys} onChange={(event) => keep({ singleKeys: event.currentTarget.checked })} />
+        <Checkbox
+          says="Single keys"
+          note="J, K, G and others; ? lists them. Switch off for speech input."
+          defaultChecked={account.singleKeys}
+          onChange={(event) => keep({ singleKeys: event.currentTarget.checked })}
+        />
       </div>
     </Section>
   );
@@ -82,10 +100,17 @@ function Choices({ account }: { account: Account }) {
 
 function FirstPassword({ email }: { email: string }) {
   const write = useWrite(requestReset);
-  if (write.isSuccess) return <p role="status">A link is on its way to {email}. It works once, for an hour.</p>;
+  if (write.isSuccess)
+    return <p role="status">A link is on its way to {email}. It works once, for an hour.</p>;
   return (
     <div className="flex flex-wrap items-center gap-3 pt-1">
-      <Button busy={write.isPending} busyLabel="Sending" onClick={() => write.mutate({ email }, { onError: (error) => showMessage({ says: error.message, failed: true }) })}>
+      <Button
+        busy={write.isPending}
+        busyLabel="Sending"
+        onClick={() =>
+          write.mutate({ email }, { onError: (error) => showMessage({ says: error.message, failed: true }) })
+        }
+      >
         Mail me a link to choose one
       </Button>
     </div>
@@ -97,9 +122,24 @@ function Sessions() {
   const write = useWrite(endMySessions);
   return (
     <Section title="Sessions">
-      <p className="pt-1 text-quiet">A lost telephone, a shared machine: this ends every session of yours, here too. Tokens for programs stay.</p>
+      <p className="pt-1 text-quiet">
+        A lost telephone, a shared machine: this ends every session of yours, here too. Tokens for programs
+        stay.
+      </p>
       <div className="pt-2.5">
-        <Button busy={write.isPending} busyLabel="Signing out" onClick={() => write.mutate({}, { onSuccess: () => router.push('/sign-in'), onError: (error) => showMessage({ says: error.message, failed: true }) })}>
+        <Button
+          busy={write.isPending}
+          busyLabel="Signing out"
+          onClick={() =>
+            write.mutate(
+              {},
+              {
+                onSuccess: () => router.push('/sign-in'),
+                onError: (error) => showMessage({ says: error.message, failed: true }),
+              },
+            )
+          }
+        >
           Sign out everywhere
         </Button>
       </div>
@@ -115,7 +155,11 @@ function Organisations({ account }: { account: Account }) {
       <ul>
         {account.organisations.map(({ membershipId, id, name, roles }) => (
           <li key={membershipId} className="border-b border-rule py-2">
-            <strong>{name}</strong> <span className="text-quiet">{roles.join(', ')}{id === current && ', just now'}</span>
+            <strong>{name}</strong>{' '}
+            <span className="text-quiet">
+              {roles.join(', ')}
+              {id === current && ', just now'}
+            </span>
           </li>
         ))}
       </ul>

@@ -27,12 +27,27 @@ export function InviteForm() {
     }),
   );
   return (
-    <form noValidate onSubmit={(event) => void send(event)} className="grid gap-x-6 gap-y-3 pt-1 md:grid-cols-2">
+    <form
+      noValidate
+      onSubmit={(event) => void send(event)}
+      className="grid gap-x-6 gap-y-3 pt-1 md:grid-cols-2"
+    >
       <div className="flex flex-col gap-3">
         <TextField label="Name" autoComplete="off" error={errors.name?.message} {...form.register('name')} />
-        <TextField label="E-mail" type="email" autoComplete="off" error={errors.email?.message} {...form.register('email')} />
+        <TextField
+          label="E-mail"
+          type="email"
+          autoComplete="off"
+          error={errors.email?.message}
+          {...form.register('email')}
+        />
       </div>
-      <CheckboxGroup label="Roles" options={ROLE_CHOICES} error={errors.roles?.message} {...form.register('roles')} />
+      <CheckboxGroup
+        label="Roles"
+        options={ROLE_CHOICES}
+        error={errors.roles?.message}
+        {...form.register('roles')}
+      />
       <div className="md:col-span-2">
         <FormRefusal says={errors.root?.message} />
         <Button type="submit" look="primary" busy={write.isPending} busyLabel="Sending">

@@ -27,21 +27,44 @@ export function MemberForm({ person, done }: { person: TeamMember; done: () => v
     },
     onError: showOnForm(form),
   });
-  const save = form.handleSubmit((typed) => roles.mutate({ personId, version, ...typed }, told(`Roles of ${name} saved.`)));
+  const save = form.handleSubmit((typed) =>
+    roles.mutate({ personId, version, ...typed }, told(`Roles of ${name} saved.`)),
+  );
   return (
     <form noValidate onSubmit={(event) => void save(event)} className="flex flex-col gap-3 pb-3">
-      <CheckboxGroup label={`What ${name} may do`} options={ROLE_CHOICES} error={errors.roles?.message} {...form.register('roles')} />
+      <CheckboxGroup
+        label={`What ${name} may do`}
+        options={ROLE_CHOICES}
+        error={errors.roles?.message}
+        {...form.register('roles')}
+      />
       <FormRefusal says={errors.root?.message} />
       <div className="flex flex-wrap gap-2.5">
         <Button type="submit" busy={roles.isPending} busyLabel="Saving">
           Save the roles
         </Button>
         {person.active ? (
-          <Button look="stop" busy={active.isPending} busyLabel="Closing" onClick={() => active.mutate({ personId, version, active: false }, told(`${name} can no longer enter this shop.`))}>
+          <Button
+            look="stop"
+            busy={active.isPending}
+            busyLabel="Closing"
+            onClick={() =>
+              active.mutate(
+                { personId, version, active: false },
+                told(`${name} can no longer enter this shop.`),
+              )
+            }
+          >
             {`Close the way in for ${name}`}
           </Button>
         ) : (
-          <Button busy={active.isPending} busyLabel="Opening" onClick={() => active.mutate({ personId, version, active: true }, told(`${name} can enter this shop again.`))}>
+          <Button
+            busy={active.isPending}
+            busyLabel="Opening"
+            onClick={() =>
+              active.mutate({ personId, version, active: true }, told(`${name} can enter this shop again.`))
+            }
+          >
             {`Let ${name} in again`}
           </Button>
         )}

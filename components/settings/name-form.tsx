@@ -20,7 +20,9 @@ export function NameForm({ name, email }: { name: string; email: string }) {
     showMessage({ says: 'Name saved. Papers that are signed keep the name they were signed with.' });
     router.refresh();
   };
-  const save = form.handleSubmit((typed) => write.mutate(typed, { onSuccess: saved, onError: showOnForm(form) }));
+  const save = form.handleSubmit((typed) =>
+    write.mutate(typed, { onSuccess: saved, onError: showOnForm(form) }),
+  );
   return (
     <form noValidate onSubmit={(event) => void save(event)} className="flex flex-col gap-3 pt-1">
       <div className="grid gap-3 md:grid-cols-2">

@@ -26,12 +26,27 @@ export function PasswordForm({ signIn, page }: { signIn: SignInAction; page: str
       showMessage({ says: 'Password changed. Your other sessions have ended.' });
     });
   };
-  const save = form.handleSubmit((typed) => write.mutate(typed, { onSuccess: ({ email }) => done(email, typed.password), onError: showOnForm(form) }));
+  const save = form.handleSubmit((typed) =>
+    write.mutate(typed, { onSuccess: ({ email }) => done(email, typed.password), onError: showOnForm(form) }),
+  );
   return (
     <form noValidate onSubmit={(event) => void save(event)} className="flex flex-col gap-3 pt-1">
       <div className="grid gap-3 md:grid-cols-2">
-        <TextField label="Password you have now" type="password" autoComplete="current-password" error={errors.current?.message} {...form.register('current')} />
-        <TextField label="New password" type="password" autoComplete="new-password" hint="12 characters or more" error={errors.password?.message} {...form.register('password')} />
+        <TextField
+          label="Password you have now"
+          type="password"
+          autoComplete="current-password"
+          error={errors.current?.message}
+          {...form.register('current')}
+        />
+        <TextField
+          label="New password"
+          type="password"
+          autoComplete="new-password"
+          hint="12 characters or more"
+          error={errors.password?.message}
+          {...form.register('password')}
+        />
       </div>
       <FormRefusal says={errors.root?.message} />
       <div>

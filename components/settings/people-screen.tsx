@@ -9,7 +9,13 @@ import { PageHead } from '@/components/ui/page-head';
 import { Section } from '@/components/ui/section';
 import { Cell, Row, Table } from '@/components/ui/table';
 import { useClock } from '@/components/session/use-me';
-import { listPeople, renewInvitation, withdrawInvitation, type PendingInvitation, type TeamMember } from '@/lib/people/team-contract';
+import {
+  listPeople,
+  renewInvitation,
+  withdrawInvitation,
+  type PendingInvitation,
+  type TeamMember,
+} from '@/lib/people/team-contract';
 
 import { InviteForm } from './invite-form';
 import { MemberForm } from './member-form';
@@ -20,18 +26,43 @@ export function PeopleScreen() {
   const [openId, setOpenId] = useState<string | null>(null);
   return (
     <>
-      <PageHead title="People" sub="Roles take effect with a person’s next press. Closing an account keeps all they did." />
+      <PageHead
+        title="People"
+        sub="Roles take effect with a person’s next press. Closing an account keeps all they did."
+      />
       <div className="flex flex-col gap-7">
         <Section title="In the shop" note={`${data.people.filter((person) => person.active).length} people`}>
-          <Table label="People of the shop" columns={[{ says: 'Name' }, { says: 'E-mail' }, { says: 'Roles' }, { says: 'Action', hidden: true, right: true }]}>
+          <Table
+            label="People of the shop"
+            columns={[
+              { says: 'Name' },
+              { says: 'E-mail' },
+              { says: 'Roles' },
+              { says: 'Action', hidden: true, right: true },
+            ]}
+          >
             {data.people.map((person) => (
-              <PersonRows key={person.personId} person={person} isOpen={openId === person.personId} toggle={() => setOpenId(openId === person.personId ? null : person.personId)} />
+              <PersonRows
+                key={person.personId}
+                person={person}
+                isOpen={openId === person.personId}
+                toggle={() => setOpenId(openId === person.personId ? null : person.personId)}
+              />
             ))}
           </Table>
         </Section>
         {data.invitations.length > 0 && (
           <Section title="Invited" note="not yet accepted">
-            <Table label="Invitations" columns={[{ says: 'Name' }, { says: 'E-mail' }, { says: 'Roles' }, { says: 'Ends' }, { says: 'Action', hidden: true, right: true }]}>
+            <Table
+              label="Invitations"
+              columns={[
+                { says: 'Name' },
+                { says: 'E-mail' },
+                { says: 'Roles' },
+                { says: 'Ends' },
+                { says: 'Action', hidden: true, right: true },
+              ]}
+            >
               {data.invitations.map((invitation) => (
                 <InvitationRow key={invitation.invitationId} invitation={invitation} />
               ))}
@@ -79,7 +110,10 @@ function InvitationRow({ invitation }: { invitation: PendingInvitation }) {
   const renew = useWrite(renewInvitation, { refreshes: [listPeople] });
   const withdraw = useWrite(withdrawInvitation, { refreshes: [listPeople] });
   const { invitationId, name, email, roles, expiresAt, isExpired } = invitation;
-  const told = (says: string) => ({ onSuccess: () => showMessage({ says }), onError: (error: Error) => showMessage({ says: error.message, failed: true }) });
+  const told = (says: string) => ({
+    onSuccess: () => showMessage({ says }),
+    onError: (error: Error) => showMessage({ says: error.message, failed: true }),
+  });
   return (
     <Row>
       <Cell strong head="Name">
@@ -87,13 +121,34 @@ function InvitationRow({ invitation }: { invitation: PendingInvitation }) {
       </Cell>
       <Cell head="E-mail">{email}</Cell>
       <Cell head="Roles">{roles.join(', ')}</Cell>
-      <Cell head="Ends">{isExpired ? <span className="text-held-ink">has ended</span> : <Moment at={new Date(expiresAt)} clock={clock} />}</Cell>
+      <Cell head="Ends">
+        {isExpired ? (
+          <span className="text-held-ink">has ended</span>
+        ) : (
+          <Moment at={new Date(expiresAt)} clock={clock} />
+        )}
+      </Cell>
       <Cell right>
         <span className="inline-flex flex-wrap justify-end gap-x-4">
-          <Button look="word" busy={renew.isPending} onClick={() => renew.mutate({ invitationId }, told(`Mailed to ${email} once more. The link sent before has ended.`))}>
+          <Button
+            look="word"
+            busy={renew.isPending}
+            onClick={() =>
+              renew.mutate(
+                { invitationId },
+                told(`Mailed to ${email} once more. The link sent before has ended.`),
+              )
+            }
+          >
             Mail again
           </Button>
-          <Button look="word" busy={withdraw.isPending} onClick={() => withdraw.mutate({ invitationId }, told(`The invitation of ${email} is withdrawn.`))}>
+          <Button
+            look="word"
+            busy={withdraw.isPending}
+            onClick={() =>
+              withdraw.mutate({ invitationId }, told(`The invitation of ${email} is withdrawn.`))
+            }
+          >
             Withdraw
           </Button>
         </span>

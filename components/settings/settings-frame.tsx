@@ -21,12 +21,22 @@ const PAGES: readonly { says: string; href: string; permission: Permission }[] =
 export function SettingsFrame({ children }: { children: ReactNode }) {
   const path = usePathname();
   const roles = useMe()?.roles ?? [];
-  const pages = PAGES.filter(({ permission }) => (PERMISSIONS[permission] as readonly string[]).some((role) => roles.some((mine) => mine === role)));
+  const pages = PAGES.filter(({ permission }) =>
+    (PERMISSIONS[permission] as readonly string[]).some((role) => roles.some((mine) => mine === role)),
+  );
   return (
     <div className="grid grid-cols-1 gap-x-9 lg:grid-cols-[11.5rem_minmax(0,1fr)]">
-      <nav aria-label="Settings" className="flex flex-wrap gap-x-5 border-rule pt-4 max-lg:border-b max-lg:pb-1 lg:flex-col lg:pt-5">
+      <nav
+        aria-label="Settings"
+        className="flex flex-wrap gap-x-5 border-rule pt-4 max-lg:border-b max-lg:pb-1 lg:flex-col lg:pt-5"
+      >
         {pages.map(({ says, href }) => (
-          <Link key={href} href={href} aria-current={path === href ? 'page' : undefined} className={`flex items-center py-1.5 font-cond text-sub no-underline hover:text-ink touch:min-h-12 ${path === href ? 'text-ink underline decoration-2 underline-offset-4' : 'font-normal text-quiet'}`}>
+          <Link
+            key={href}
+            href={href}
+            aria-current={path === href ? 'page' : undefined}
+            className={`flex items-center py-1.5 font-cond text-sub no-underline hover:text-ink touch:min-h-12 ${path === href ? 'text-ink underline decoration-2 underline-offset-4' : 'font-normal text-quiet'}`}
+          >
             {says}
           </Link>
         ))}

@@ -20,7 +20,10 @@ export function ShopScreen({ zones }: { zones: readonly string[] }) {
   const { data: shop } = useRead(getShopSettings, {});
   return (
     <>
-      <PageHead title="Shop and policies" sub="Batches, orders and invoices that exist keep what they were made under." />
+      <PageHead
+        title="Shop and policies"
+        sub="Batches, orders and invoices that exist keep what they were made under."
+      />
       <div className="flex max-w-[52rem] flex-col gap-7">
         {/* A fresh form for a fresh version: what was typed into the older one is told about, not merged. */}
         <SettingsForm key={shop.version} shop={shop} zones={zones} />
@@ -40,8 +43,16 @@ function SettingsForm({ shop, zones }: { shop: ShopSettings; zones: readonly str
   };
   const save = form.handleSubmit((typed) => {
     const above = typed.secondApproval ? parseAmount(typed.secondApprovalAbove) : null;
-    if (typed.secondApproval && above === null) return form.setError('secondApprovalAbove', { message: 'This is not an amount. Write it like 2,500.00.' }, { shouldFocus: true });
-    return write.mutate({ ...choicesOf(typed), secondApprovalAboveMinor: above, version: shop.version }, { onSuccess: saved, onError: showOnForm(form) });
+    if (typed.secondApproval && above === null)
+      return form.setError(
+        'secondApprovalAbove',
+        { message: 'This is not an amount. Write it like 2,500.00.' },
+        { shouldFocus: true },
+      );
+    return write.mutate(
+      { ...choicesOf(typed), secondApprovalAboveMinor: above, version: shop.version },
+      { onSuccess: saved, onError: showOnForm(form) },
+    );
   });
   return (
     <form noValidate onSubmit={(event) => void save(event)} className="flex flex-col gap-7">
@@ -68,10 +79,31 @@ const typedOf = (shop: ShopSettings): ShopForm => ({
   address: shop.address.join('\n'),
   phone: shop.phone ?? '',
   secondApproval: shop.secondApprovalAboveMinor !== null,
-  secondApprovalAbove: shop.secondApprovalAboveMinor === null ? '' : amountText(shop.secondApprovalAboveMinor),
+  secondApprovalAbove:
+    shop.secondApprovalAboveMinor === null ? '' : amountText(shop.secondApprovalAboveMinor),
 });
 
-function choicesOf({ name, address, phone, zone, currency, orderPrefix, dispatchAndAcceptance, approvalAndPayment, latenessBasis }: ShopForm) {
+function choicesOf({
+  name,
+  address,
+  phone,
+  zone,
+  currency,
+  orderPrefix,
+  dispatchAndAcceptance,
+  approvalAndPayment,
+  latenessBasis,
+}: ShopForm) {
   const lines = address.split('\n').map((line) => line.trim());
-  return { name, address: lines.filter((line) => line !== ''), phone: phone.trim() === '' ? null : phone, zone, currency, orderPrefix, dispatchAndAcceptance, approvalAndPayment, latenessBasis };
+  return {
+    name,
+    address: lines.filter((line) => line !== ''),
+    phone: phone.trim() === '' ? null : phone,
+    zone,
+    currency,
+    orderPrefix,
+    dispatchAndAcceptance,
+    approvalAndPayment,
+    latenessBasis,
+  };
 }

@@ -35,11 +35,31 @@ export function TokenForm({ scopes, onMade }: TokenFormProps) {
   return (
     <form noValidate onSubmit={(event) => void make(event)} className="flex flex-col gap-4 pt-1">
       <div className="grid gap-x-6 gap-y-3 md:grid-cols-2">
-        <TextField label="What it is for" hint="the program, or the machine it runs on" autoComplete="off" error={errors.name?.message} {...form.register('name')} />
-        <DateField label="Last day" hint="left empty: until you revoke it" error={errors.lastDay?.message} {...form.register('lastDay')} />
+        <TextField
+          label="What it is for"
+          hint="the program, or the machine it runs on"
+          autoComplete="off"
+          error={errors.name?.message}
+          {...form.register('name')}
+        />
+        <DateField
+          label="Last day"
+          hint="left empty: until you revoke it"
+          error={errors.lastDay?.message}
+          {...form.register('lastDay')}
+        />
       </div>
       <div>
-        <CheckboxGroup label="It may" className="gap-x-6 md:columns-2 xl:columns-4" options={scopes.map((scope) => ({ value: scope, says: scope.replace('.', ': ').replaceAll('_', ' ') }))} error={errors.scopes?.message} {...form.register('scopes')} />
+        <CheckboxGroup
+          label="It may"
+          className="gap-x-6 md:columns-2 xl:columns-4"
+          options={scopes.map((scope) => ({
+            value: scope,
+            says: scope.replace('.', ': ').replaceAll('_', ' '),
+          }))}
+          error={errors.scopes?.message}
+          {...form.register('scopes')}
+        />
       </div>
       <FormRefusal says={errors.root?.message} />
       <div>

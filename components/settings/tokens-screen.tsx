@@ -21,14 +21,30 @@ export function TokensScreen() {
   const [made, setMade] = useState<{ name: string; token: string } | null>(null);
   return (
     <>
-      <PageHead title="Tokens for programs" sub="A program with your token does what you may do and you chose here, in your name. Signing and paying stay yours." />
+      <PageHead
+        title="Tokens for programs"
+        sub="A program with your token does what you may do and you chose here, in your name. Signing and paying stay yours."
+      />
       <div className="flex flex-col gap-7">
         {made && <MadeToken {...made} />}
-        <Section title="My tokens" note={String(data.tokens.filter((token) => token.revokedAt === null).length)}>
+        <Section
+          title="My tokens"
+          note={String(data.tokens.filter((token) => token.revokedAt === null).length)}
+        >
           {data.tokens.length === 0 ? (
             <Empty says="You have no token." comes="A program needs one to read or write in your name." />
           ) : (
-            <Table label="My tokens" columns={[{ says: 'For' }, { says: 'Begins with' }, { says: 'May' }, { says: 'Last used' }, { says: 'Ends' }, { says: 'Action', hidden: true, right: true }]}>
+            <Table
+              label="My tokens"
+              columns={[
+                { says: 'For' },
+                { says: 'Begins with' },
+                { says: 'May' },
+                { says: 'Last used' },
+                { says: 'Ends' },
+                { says: 'Action', hidden: true, right: true },
+              ]}
+            >
               {data.tokens.map((token) => (
                 <TokenRow key={token.id} token={token} />
               ))}
@@ -51,7 +67,12 @@ function MadeToken({ name, token }: { name: string; token: string }) {
         <p className="num py-1.5 break-all select-all" data-testid="made-token">
           {token}
         </p>
-        <Button look="word" onClick={() => navigator.clipboard.writeText(token).then(() => showMessage({ says: 'Token copied.' }))}>
+        <Button
+          look="word"
+          onClick={() =>
+            navigator.clipboard.writeText(token).then(() => showMessage({ says: 'Token copied.' }))
+          }
+        >
           Copy
         </Button>
       </div>
@@ -62,8 +83,16 @@ function MadeToken({ name, token }: { name: string; token: string }) {
 function TokenRow({ token }: { token: ApiToken }) {
   const clock = useClock();
   const write = useWrite(revokeToken, { refreshes: [listTokens] });
-  const isOver = token.revokedAt !== null || (token.expiresAt !== null && new Date(token.expiresAt) < clock.now);
-  const revoke = () => write.mutate({ tokenId: token.id }, { onSuccess: () => showMessage({ says: `The token for ${token.name} has ended.` }), onError: (error) => showMessage({ says: error.message, failed: true }) });
+  const isOver =
+    token.revokedAt !== null || (token.expiresAt !== null && new Date(token.expiresAt) < clock.now);
+  const revoke = () =>
+    write.mutate(
+      { tokenId: token.id },
+      {
+        onSuccess: () => showMessage({ says: `The token for ${token.name} has ended.` }),
+        onError: (error) => showMessage({ says: error.message, failed: true }),
+      },
+    );
   return (
     <Row state={isOver ? 'off' : 'rest'}>
       <Cell strong head="For">
@@ -78,7 +107,13 @@ function TokenRow({ token }: { token: ApiToken }) {
           {token.scopes.join(', ')}
         </details>
       </Cell>
-      <Cell head="Last used">{token.lastUsedAt === null ? <span className="text-quiet">never</span> : <Moment at={new Date(token.lastUsedAt)} clock={clock} />}</Cell>
+      <Cell head="Last used">
+        {token.lastUsedAt === null ? (
+          <span className="text-quiet">never</span>
+        ) : (
+          <Moment at={new Date(token.lastUsedAt)} clock={clock} />
+        )}
+      </Cell>
       <Cell head="Ends">{endWords(token, clock)}</Cell>
       <Cell right>
         {!isOver && (
@@ -94,5 +129,9 @@ function TokenRow({ token }: { token: ApiToken }) {
 
 function endWords({ revokedAt, expiresAt }: ApiToken, clock: ReturnType<typeof useClock>) {
   if (revokedAt !== null) return 'revoked';
-  return expiresAt === null ? <span className="text-quiet">when revoked</span> : <Moment at={new Date(expiresAt)} clock={clock} />;
+  return expiresAt === null ? (
+    <span className="text-quiet">when revoked</span>
+  ) : (
+    <Moment at={new Date(expiresAt)} clock={clock} />
+  );
 }

@@ -19,10 +19,21 @@ export interface AppHeadProps {
 }
 
 /** 48 px: mark, sections, one field for any number, shop and person. */
-export function AppHead({ organisation, person, roles, sections, numberField, personPanel, home = '/' }: AppHeadProps) {
+export function AppHead({
+  organisation,
+  person,
+  roles,
+  sections,
+  numberField,
+  personPanel,
+  home = '/',
+}: AppHeadProps) {
   return (
     <header className="lw-head flex flex-wrap items-stretch border-b-heavy border-ink bg-paper px-6 max-md:px-4">
-      <Link href={home} className="flex h-12 items-center gap-2 pr-5 font-cond text-[1.25rem] leading-none font-bold no-underline">
+      <Link
+        href={home}
+        className="flex h-12 items-center gap-2 pr-5 font-cond text-[1.25rem] leading-none font-bold no-underline"
+      >
         <BrandMark />
         <span className="max-md:sr-only">Lotwright</span>
       </Link>

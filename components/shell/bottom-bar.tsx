@@ -19,7 +19,8 @@ interface BottomBarProps {
 }
 
 const MORE_ID = 'more-sections';
-const CELL = 'relative flex items-center justify-center gap-2 border-l border-rule text-sub font-cond no-underline focus-visible:z-10';
+const CELL =
+  'relative flex items-center justify-center gap-2 border-l border-rule text-sub font-cond no-underline focus-visible:z-10';
 
 /** On a phone: four things within reach of a thumb. */
 export function BottomBar(props: BottomBarProps) {
@@ -66,7 +67,9 @@ export function BottomBar(props: BottomBarProps) {
               className="flex min-h-12 items-center gap-2 border-b border-rule font-cond text-sub no-underline aria-[current]:border-ink"
             >
               {section.says}
-              {section.count ? <span className="num font-semibold text-held-ink">{section.count}</span> : null}
+              {section.count ? (
+                <span className="num font-semibold text-held-ink">{section.count}</span>
+              ) : null}
             </Link>
           ))}
         </nav>

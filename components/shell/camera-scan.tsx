@@ -44,8 +44,12 @@ export function CameraScan({ onCode }: { onCode: (code: string) => void }) {
         className="aspect-square w-full bg-deep object-cover"
         aria-label="What the camera sees"
       />
-      {state === 'no_reader' && <p>This device cannot read codes by itself. Type the number under the code.</p>}
-      {state === 'no_camera' && <p>The camera did not open. Allow it for this page, or type the number under the code.</p>}
+      {state === 'no_reader' && (
+        <p>This device cannot read codes by itself. Type the number under the code.</p>
+      )}
+      {state === 'no_camera' && (
+        <p>The camera did not open. Allow it for this page, or type the number under the code.</p>
+      )}
     </>
   );
 }

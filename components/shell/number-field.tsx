@@ -33,7 +33,13 @@ interface Found {
 const WAIT_MS = 140;
 
 /** One field for any number. A scanner ends with Enter: what it names opens without a list in between. */
-export function NumberField({ search, takesScans = true, autoFocus = false, onOpened, className = '' }: NumberFieldProps) {
+export function NumberField({
+  search,
+  takesScans = true,
+  autoFocus = false,
+  onOpened,
+  className = '',
+}: NumberFieldProps) {
   const router = useRouter();
   const id = useId();
   const [text, setText] = useState('');
@@ -60,7 +66,10 @@ export function NumberField({ search, takesScans = true, autoFocus = false, onOp
     async (wanted: string): Promise<Found> => {
       asked.current = wanted;
       const answer = await search(wanted).then(
-        (hits): Found => ({ text: wanted, hits: byKind(hits).flatMap((kind) => kind.members.map(({ hit }) => hit)) }),
+        (hits): Found => ({
+          text: wanted,
+          hits: byKind(hits).flatMap((kind) => kind.members.map(({ hit }) => hit)),
+        }),
         (): Found => ({ text: wanted, hits: [], failed: true }),
       );
       // A slow answer to an older question must not cover a newer one.
@@ -78,7 +87,8 @@ export function NumberField({ search, takesScans = true, autoFocus = false, onOp
     async (wanted: string) => {
       clearTimeout(timer.current);
       const { hits } = await ask(wanted);
-      const only = hits.length === 1 ? hits[0] : hits.find((hit) => hit.number.toLowerCase() === wanted.toLowerCase());
+      const only =
+        hits.length === 1 ? hits[0] : hits.find((hit) => hit.number.toLowerCase() === wanted.toLowerCase());
       if (only) go(only);
     },
     [ask, go],
@@ -120,7 +130,8 @@ export function NumberField({ search, takesScans = true, autoFocus = false, onOp
     if (event.key === 'ArrowDown' || event.key === 'ArrowUp') {
       event.preventDefault();
       const by = event.key === 'ArrowDown' ? 1 : -1;
-      if (hits.length > 0) setActive((active + by + (active < 0 && by < 0 ? 1 : 0) + hits.length) % hits.length);
+      if (hits.length > 0)
+        setActive((active + by + (active < 0 && by < 0 ? 1 : 0) + hits.length) % hits.length);
       setOpen(found !== null);
     } else if (event.key === 'Enter') {
       event.preventDefault();
@@ -134,7 +145,11 @@ export function NumberField({ search, takesScans = true, autoFocus = false, onOp
   };
 
   return (
-    <div role="search" className={`relative ${className}`} onBlur={(event) => leaves(event) && setOpen(false)}>
+    <div
+      role="search"
+      className={`relative ${className}`}
+      onBlur={(event) => leaves(event) && setOpen(false)}
+    >
       <input
         ref={field}
         data-number-field=""
@@ -153,7 +168,7 @@ export function NumberField({ search, takesScans = true, autoFocus = false, onOp
         onChange={(event) => type(event.currentTarget.value)}
         onKeyDown={onKeyDown}
         onFocus={() => setOpen(found !== null)}
-        className="h-8 touch:h-11 w-full border border-line bg-field pr-9 pl-2 text-string font-sans placeholder:text-faint"
+        className="h-8 w-full border border-line bg-field pr-9 pl-2 font-sans text-string placeholder:text-faint touch:h-11"
       />
       <kbd aria-hidden="true" className="absolute top-1/2 right-2 -translate-y-1/2 touch:hidden">
         /
@@ -187,7 +202,11 @@ function HitList({ id, found, active, go }: HitListProps) {
       >
         {byKind(hits).map(({ kind, members }) => (
           <div key={kind} role="group" aria-labelledby={`${id}-${kind}`}>
-            <div id={`${id}-${kind}`} role="presentation" className="px-3 pt-2 pb-0.5 font-cond text-caption text-faint">
+            <div
+              id={`${id}-${kind}`}
+              role="presentation"
+              className="px-3 pt-2 pb-0.5 font-cond text-caption text-faint"
+            >
               {kind}
             </div>
             {members.map(({ hit, index }) => (
@@ -199,7 +218,7 @@ function HitList({ id, found, active, go }: HitListProps) {
                 // The field keeps the focus: losing it would close the list before the press is done.
                 onPointerDown={(event) => event.preventDefault()}
                 onClick={() => go(hit)}
-                className={`flex min-h-[31px] touch:min-h-12 cursor-pointer items-center gap-3 border-b border-rule px-3 py-1 text-row hover:bg-bench ${
+                className={`flex min-h-[31px] cursor-pointer items-center gap-3 border-b border-rule px-3 py-1 text-row hover:bg-bench touch:min-h-12 ${
                   index === active ? 'bg-bench shadow-none outline-1 -outline-offset-1 outline-ink' : ''
                 }`}
               >
@@ -210,7 +229,14 @@ function HitList({ id, found, active, go }: HitListProps) {
           </div>
         ))}
       </div>
-      <div role="status" className={found && hits.length === 0 ? 'absolute top-full right-0 z-40 mt-1 w-full min-w-60 border-heavy border-ink bg-paper px-3 py-2 text-second' : 'sr-only'}>
+      <div
+        role="status"
+        className={
+          found && hits.length === 0
+            ? 'absolute top-full right-0 z-40 mt-1 w-full min-w-60 border-heavy border-ink bg-paper px-3 py-2 text-second'
+            : 'sr-only'
+        }
+      >
         {found && sentenceOf(found)}
       </div>
     </>

@@ -52,7 +52,11 @@ export function PersonPanel({ look, singleKeys, accountHref, signOut, extra }: P
         <Link href={accountHref} className="lw-word-button">
           My account
         </Link>
-        <form action={signOut} {...(typeof signOut === 'string' ? { method: 'post' } : {})} className="ml-auto">
+        <form
+          action={signOut}
+          {...(typeof signOut === 'string' ? { method: 'post' } : {})}
+          className="ml-auto"
+        >
           <Button type="submit" size="small">
             Sign out
           </Button>

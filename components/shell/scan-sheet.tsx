@@ -28,7 +28,11 @@ export function ScanSheet({ search, children = 'Scan a tag' }: ScanSheetProps) {
 
   return (
     <>
-      <button type="button" className="bg-ink font-cond text-sub text-paper focus-visible:z-10" onClick={() => setOpen(true)}>
+      <button
+        type="button"
+        className="bg-ink font-cond text-sub text-paper focus-visible:z-10"
+        onClick={() => setOpen(true)}
+      >
         {children}
       </button>
       <Dialog

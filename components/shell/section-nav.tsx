@@ -19,7 +19,9 @@ export function SectionNav({ sections }: { sections: readonly SectionLink[] }) {
             key={section.href}
             href={section.href}
             aria-current={current ? 'page' : undefined}
-            {...(section.letter ? { 'data-key': `g ${section.letter.toLowerCase()}`, 'data-key-says': section.says } : {})}
+            {...(section.letter
+              ? { 'data-key': `g ${section.letter.toLowerCase()}`, 'data-key-says': section.says }
+              : {})}
             className={`relative flex h-12 items-center gap-1.5 px-2.5 whitespace-nowrap no-underline hover:text-ink focus-visible:z-10 max-xl:px-1.5 ${
               current
                 ? 'font-semibold text-ink after:absolute after:inset-x-2.5 after:-bottom-[1.5px] after:h-1 after:bg-ink max-xl:after:inset-x-1.5'

@@ -27,14 +27,26 @@ export function LabelSheet({ batchId, ofAll, labels, shop, clock }: LabelSheetPr
           sub="100 × 60 mm, one a page. Choose the label printer, scale 100 %, no margins."
           actions={
             <>
-              {count < ofAll && <ButtonLink href={`/batches/${batchId}/labels`}>All {ofAll} labels</ButtonLink>}
+              {count < ofAll && (
+                <ButtonLink href={`/batches/${batchId}/labels`}>All {ofAll} labels</ButtonLink>
+              )}
               <ButtonLink href={`/batches/${batchId}/release`}>To the gate</ButtonLink>
               {count > 0 && <PrintButton says={count === 1 ? 'Print the label' : `Print ${count} labels`} />}
             </>
           }
         />
       </div>
-      {count === 0 && <Empty says="No labels yet." comes="Each release of pieces has one." action={<ButtonLink look="word" href={`/batches/${batchId}/release`}>To the gate</ButtonLink>} />}
+      {count === 0 && (
+        <Empty
+          says="No labels yet."
+          comes="Each release of pieces has one."
+          action={
+            <ButtonLink look="word" href={`/batches/${batchId}/release`}>
+              To the gate
+            </ButtonLink>
+          }
+        />
+      )}
       <div className="lw-labels">
         {labels.map(({ release, code }) => (
           <Label key={release.id} release={release} code={code} shop={shop} clock={clock} />

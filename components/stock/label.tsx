@@ -25,7 +25,9 @@ export function Label({ release, shop, code, clock }: LabelProps) {
       <div className="lw-label-body">
         <div className="lw-label-top">
           <div className="min-w-0">
-            <div className={`lw-label-number ${release.lotNumber.length > 12 ? 'lw-label-long' : ''}`}>{release.lotNumber}</div>
+            <div className={`lw-label-number ${release.lotNumber.length > 12 ? 'lw-label-long' : ''}`}>
+              {release.lotNumber}
+            </div>
             <div className="lw-label-shop">
               {stands}, {shop}
             </div>
@@ -48,7 +50,14 @@ export function Label({ release, shop, code, clock }: LabelProps) {
           <Fact caption="Material" says={release.material} />
           <Fact caption="Condition" says={release.condition} />
           <Fact caption="Heat" says={release.heat} />
-          {release.location === null ? <Fact caption="Goes on to" says={release.nextProcess ? PROCESS_WORDS[release.nextProcess] : 'the next step'} /> : <Fact caption="Place" says={release.location} />}
+          {release.location === null ? (
+            <Fact
+              caption="Goes on to"
+              says={release.nextProcess ? PROCESS_WORDS[release.nextProcess] : 'the next step'}
+            />
+          ) : (
+            <Fact caption="Place" says={release.location} />
+          )}
         </dl>
         <p className="lw-label-foot">{footWords(release, clock)}</p>
       </div>
@@ -64,7 +73,15 @@ function Outline() {
         <path d="M6.4 1H99V59H6.4L1 53.6V6.4Z" fill="#fff" stroke="#000" strokeWidth="0.5" />
         <path d="M6.4 1H16V59H6.4L1 53.6V6.4Z" className="lw-label-edge" stroke="#000" strokeWidth="0.5" />
         <circle cx="8.5" cy="30" r="4" fill="#fff" stroke="#000" strokeWidth="0.375" />
-        <circle cx="8.5" cy="30" r="2.5" fill="none" stroke="#000" strokeWidth="0.25" strokeDasharray="0.5 0.5" />
+        <circle
+          cx="8.5"
+          cy="30"
+          r="2.5"
+          fill="none"
+          stroke="#000"
+          strokeWidth="0.25"
+          strokeDasharray="0.5 0.5"
+        />
       </svg>
       <span className="lw-label-mark">
         <StageMark stage="stocked" size={16} />
@@ -77,7 +94,14 @@ function Outline() {
 function Code({ path, width, says }: LabelCode & { says: string }) {
   const side = `calc(var(--mm) * ${width / 2})`;
   return (
-    <svg viewBox={`0 0 ${width} ${width}`} role="img" aria-label={says} shapeRendering="crispEdges" style={{ width: side, height: side }} className="flex-none">
+    <svg
+      viewBox={`0 0 ${width} ${width}`}
+      role="img"
+      aria-label={says}
+      shapeRendering="crispEdges"
+      style={{ width: side, height: side }}
+      className="flex-none"
+    >
       <path d={path} fill="#000" />
     </svg>
   );
@@ -98,14 +122,17 @@ function footWords(release: Release, clock: Clock): string {
   const parts = [
     serials.length > 0 ? serialWords(serials) : null,
     provedOn === null ? null : `proved ${withYear(provedOn, clock)}`,
-    certificates.length > 0 ? `cert. ${certificates.slice(0, 2).join(', ')}${certificates.length > 2 ? ` and ${certificates.length - 2} more` : ''}` : null,
+    certificates.length > 0
+      ? `cert. ${certificates.slice(0, 2).join(', ')}${certificates.length > 2 ? ` and ${certificates.length - 2} more` : ''}`
+      : null,
     `batch ${batchNumber}`,
   ];
   return `${parts.filter(Boolean).join(', ')}. Scan for the dossier.`;
 }
 
 const MOST_SERIALS = 6;
-const serialWords = (serials: readonly string[]) => `${serials.slice(0, MOST_SERIALS).join(' ')}${serials.length > MOST_SERIALS ? ` and ${serials.length - MOST_SERIALS} more` : ''}`;
+const serialWords = (serials: readonly string[]) =>
+  `${serials.slice(0, MOST_SERIALS).join(' ')}${serials.length > MOST_SERIALS ? ` and ${serials.length - MOST_SERIALS} more` : ''}`;
 
 function withYear(day: string, clock: Clock): string {
   const words = shortDayWords(day, clock);

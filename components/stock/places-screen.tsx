@@ -25,9 +25,19 @@ export function PlacesScreen() {
           <AddPlace look="outlined" onAdded={(place) => showMessage({ says: `${place.name} is added.` })} />
         </div>
       )}
-      {data.rows.length === 0 && <Empty says="No place is named yet." comes="Released pieces lie in a shelf, bin or rack that has a name here." />}
+      {data.rows.length === 0 && (
+        <Empty
+          says="No place is named yet."
+          comes="Released pieces lie in a shelf, bin or rack that has a name here."
+        />
+      )}
       {data.rows.length > 0 && (
-        <Table label="Places" columns={[{ says: 'Place' }, { says: 'Pieces', right: true }]} keep className="max-w-xl">
+        <Table
+          label="Places"
+          columns={[{ says: 'Place' }, { says: 'Pieces', right: true }]}
+          keep
+          className="max-w-xl"
+        >
           {data.rows.map((place) => (
             <Row key={place.id} state={place.closed ? 'off' : 'rest'}>
               <Cell strong>

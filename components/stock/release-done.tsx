@@ -15,7 +15,9 @@ export interface Released {
 export function ReleaseDone({ batchId, released }: { batchId: string; released: readonly Released[] }) {
   const ids = released.flatMap((one) => one.releaseIds);
   // Released twice in a row, an assembly stands as the last press left it.
-  const assemblies = [...new Map(released.flatMap((one) => one.assemblies).map((one) => [one.id, one])).values()];
+  const assemblies = [
+    ...new Map(released.flatMap((one) => one.assemblies).map((one) => [one.id, one])).values(),
+  ];
   return (
     <div role="status" className="pb-5">
       <Section
@@ -27,18 +29,21 @@ export function ReleaseDone({ batchId, released }: { batchId: string; released: 
         }
       >
         <ul>
-          {released.flatMap((one) => one.moved).map((says, at) => (
-            <li key={at} className="flex items-start gap-2 border-b border-rule py-1.5">
-              <VerdictMark verdict="meets" size={13} className="mt-1 text-proved-ink" />
-              {says}
-            </li>
-          ))}
+          {released
+            .flatMap((one) => one.moved)
+            .map((says, at) => (
+              <li key={at} className="flex items-start gap-2 border-b border-rule py-1.5">
+                <VerdictMark verdict="meets" size={13} className="mt-1 text-proved-ink" />
+                {says}
+              </li>
+            ))}
           {assemblies.map((one) => (
             <li key={one.id} className="border-b border-rule py-1.5 pl-[21px]">
               <Link href={`/assemblies/${one.id}`} className="font-cond text-word">
                 {one.name}
               </Link>{' '}
-              now has <strong className="num">{one.ready}</strong> of <span className="num">{one.needed}</span>
+              now has <strong className="num">{one.ready}</strong> of{' '}
+              <span className="num">{one.needed}</span>
               {one.ready >= one.needed && ': all it needs'}
             </li>
           ))}

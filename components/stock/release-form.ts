@@ -10,27 +10,35 @@ type Input = InputOf<typeof releasePieces>;
 /** As typed; empty is none. Of a lot whose pieces have names, the ticked names are the count. */
 export const ReleaseForm = z.object({
   lines: z.array(
-    z.object({
-      lineId: z.string(),
-      lineNo: z.number(),
-      mayPass: z.number(),
-      goesOn: z.boolean(),
-      isNamed: z.boolean(),
-      pieces: z.preprocess((typed) => (typed === '' ? '0' : typed), piecesField()),
-      names: z.array(z.string()),
-      locationId: z.string(),
-    })
+    z
+      .object({
+        lineId: z.string(),
+        lineNo: z.number(),
+        mayPass: z.number(),
+        goesOn: z.boolean(),
+        isNamed: z.boolean(),
+        pieces: z.preprocess((typed) => (typed === '' ? '0' : typed), piecesField()),
+        names: z.array(z.string()),
+        locationId: z.string(),
+      })
       .superRefine((line, issues) => {
         const pieces = countOf(line);
-        if (pieces > line.mayPass) issues.addIssue({ code: 'custom', path: ['pieces'], message: `${line.mayPass} may pass now. Enter ${line.mayPass} or less.` });
-        if (pieces > 0 && !line.goesOn && line.locationId === '') issues.addIssue({ code: 'custom', path: ['locationId'], message: 'Choose the place they go to.' });
+        if (pieces > line.mayPass)
+          issues.addIssue({
+            code: 'custom',
+            path: ['pieces'],
+            message: `${line.mayPass} may pass now. Enter ${line.mayPass} or less.`,
+          });
+        if (pieces > 0 && !line.goesOn && line.locationId === '')
+          issues.addIssue({ code: 'custom', path: ['locationId'], message: 'Choose the place they go to.' });
       }),
   ),
 });
 export type ReleaseFormIn = z.input<typeof ReleaseForm>;
 export type ReleaseFormOut = z.output<typeof ReleaseForm>;
 
-const countOf = (line: { isNamed: boolean; names: readonly string[]; pieces: number }) => (line.isNamed ? line.names.length : line.pieces);
+const countOf = (line: { isNamed: boolean; names: readonly string[]; pieces: number }) =>
+  line.isNamed ? line.names.length : line.pieces;
 
 /** All that may pass, to where such pieces went the last time. */
 export const allThatMay = (lines: readonly GateLine[]): ReleaseFormIn => ({
@@ -52,7 +60,12 @@ export function releaseOf(batchId: string, { lines }: ReleaseFormOut): Input {
     batchId,
     lines: lines
       .filter((line) => countOf(line) > 0)
-      .map((line) => ({ lineId: line.lineId, pieces: countOf(line), locationId: line.goesOn ? null : line.locationId, ...(line.isNamed ? { pieceIds: line.names } : {}) })),
+      .map((line) => ({
+        lineId: line.lineId,
+        pieces: countOf(line),
+        locationId: line.goesOn ? null : line.locationId,
+        ...(line.isNamed ? { pieceIds: line.names } : {}),
+      })),
   };
 }
 
@@ -70,7 +83,8 @@ export function chosenOf({ lines }: ReleaseFormIn): { toStock: number; goingOn: 
     if (line.isNamed) return line.names.length;
     return typeof line.pieces === 'string' && /^\s*\d+\s*$/.test(line.pieces) ? Number(line.pieces) : 0;
   };
-  const sum = (goesOn: boolean) => lines.filter((line) => line.goesOn === goesOn).reduce((all, line) => all + read(line), 0);
+  const sum = (goesOn: boolean) =>
+    lines.filter((line) => line.goesOn === goesOn).reduce((all, line) => all + read(line), 0);
   return { toStock: sum(false), goingOn: sum(true) };
 }
 

@@ -17,7 +17,16 @@ import { getGate, listReleases, listStock, releasePieces } from '@/lib/stock/con
 import { AddPlace } from './add-place';
 import { listWords } from './missing-words';
 import type { Released } from './release-done';
-import { allThatMay, atFormLine, chosenOf, ReleaseForm as Schema, releaseOf, releaseWords, type ReleaseFormIn, type ReleaseFormOut } from './release-form';
+import {
+  allThatMay,
+  atFormLine,
+  chosenOf,
+  ReleaseForm as Schema,
+  releaseOf,
+  releaseWords,
+  type ReleaseFormIn,
+  type ReleaseFormOut,
+} from './release-form';
 import { ReleaseLine } from './release-line';
 
 type Gate = OutputOf<typeof getGate>;
@@ -30,7 +39,10 @@ interface ReleaseFormProps {
 
 export function ReleaseForm({ gate, mayRelease, onReleased }: ReleaseFormProps) {
   const { batchId, lines, locations } = gate;
-  const form = useForm<ReleaseFormIn, unknown, ReleaseFormOut>({ resolver: zodResolver(Schema), defaultValues: allThatMay(lines) });
+  const form = useForm<ReleaseFormIn, unknown, ReleaseFormOut>({
+    resolver: zodResolver(Schema),
+    defaultValues: allThatMay(lines),
+  });
   const chosen = chosenOf({ lines: useWatch({ control: form.control, name: 'lines' }) });
   const [asked, setAsked] = useState<InputOf<typeof releasePieces> | null>(null);
   const write = useWrite(releasePieces, { refreshes: [getGate, listReleases, listStock, listAssemblies] });
@@ -42,7 +54,11 @@ export function ReleaseForm({ gate, mayRelease, onReleased }: ReleaseFormProps) 
     if (!asked) return;
     try {
       const done = await write.mutateAsync(asked);
-      onReleased({ moved: movedWords(asked, gate), releaseIds: done.releases.map((one) => one.id), assemblies: done.assemblies });
+      onReleased({
+        moved: movedWords(asked, gate),
+        releaseIds: done.releases.map((one) => one.id),
+        assemblies: done.assemblies,
+      });
     } catch (error) {
       refuse(error as ApiError, asked);
     }
@@ -50,20 +66,40 @@ export function ReleaseForm({ gate, mayRelease, onReleased }: ReleaseFormProps) 
   };
   const refuse = ({ problem }: ApiError, sent: InputOf<typeof releasePieces>) => {
     const fields = (problem.fields ?? []).map((one) => atFormLine(one, sent, form.getValues()));
-    fields.forEach(({ field, message }, at) => form.setError(field as 'lines.0.pieces', { type: 'server', message }, { shouldFocus: at === 0 }));
+    fields.forEach(({ field, message }, at) =>
+      form.setError(field as 'lines.0.pieces', { type: 'server', message }, { shouldFocus: at === 0 }),
+    );
     form.setError('root', { type: 'server', message: problem.title });
   };
 
   return (
     <FormProvider {...form}>
-      <form noValidate aria-label={`Release ${gate.number}`} onSubmit={form.handleSubmit((values) => setAsked(releaseOf(batchId, values)))}>
-        {mayRelease && open.some((line) => line.nextProcess === null) && <PlaceForAll gate={gate} onChoose={(id) => chooseForAll(form, id)} />}
+      <form
+        noValidate
+        aria-label={`Release ${gate.number}`}
+        onSubmit={form.handleSubmit((values) => setAsked(releaseOf(batchId, values)))}
+      >
+        {mayRelease && open.some((line) => line.nextProcess === null) && (
+          <PlaceForAll gate={gate} onChoose={(id) => chooseForAll(form, id)} />
+        )}
         {lines.map((line, at) => (
-          <ReleaseLine key={line.lineId} line={line} at={at} batch={gate} locations={locations} mayRelease={mayRelease} />
+          <ReleaseLine
+            key={line.lineId}
+            line={line}
+            at={at}
+            batch={gate}
+            locations={locations}
+            mayRelease={mayRelease}
+          />
         ))}
         {mayRelease && open.length > 0 && (
           <div className="sticky bottom-0 z-10 flex flex-wrap items-center gap-x-6 gap-y-2 border-t-heavy border-ink bg-paper py-3 max-md:bottom-[60px]">
-            <Button look="primary" size="big" type="submit" notNow={pieces === 0 && 'Choose at least one piece.'}>
+            <Button
+              look="primary"
+              size="big"
+              type="submit"
+              notNow={pieces === 0 && 'Choose at least one piece.'}
+            >
               {releaseWords(chosen)}
             </Button>
             {root && (
@@ -92,13 +128,17 @@ export function ReleaseForm({ gate, mayRelease, onReleased }: ReleaseFormProps) 
         }
       >
         <ul aria-label="What is released">
-          {asked && movedWords(asked, gate).map((says) => (
-            <li key={says} className="border-b border-rule py-1.5">
-              {says}
-            </li>
-          ))}
+          {asked &&
+            movedWords(asked, gate).map((says) => (
+              <li key={says} className="border-b border-rule py-1.5">
+                {says}
+              </li>
+            ))}
         </ul>
-        <Caution>The drawing, the order and the governing specification come first. The gate counts papers; it has not seen the pieces.</Caution>
+        <Caution>
+          The drawing, the order and the governing specification come first. The gate counts papers; it has
+          not seen the pieces.
+        </Caution>
       </Dialog>
     </FormProvider>
   );
@@ -127,9 +167,19 @@ function PlaceForAll({ gate, onChoose }: { gate: Gate; onChoose: (locationId: st
   );
 }
 
-function chooseForAll(form: ReturnType<typeof useForm<ReleaseFormIn, unknown, ReleaseFormOut>>, locationId: string): void {
+function chooseForAll(
+  form: ReturnType<typeof useForm<ReleaseFormIn, unknown, ReleaseFormOut>>,
+  locationId: string,
+): void {
   // The select can only show a place that the gate has been read with again.
-  setTimeout(() => form.getValues().lines.forEach((line, at) => line.goesOn || form.setValue(`lines.${at}.locationId`, locationId, { shouldValidate: true })));
+  setTimeout(() =>
+    form
+      .getValues()
+      .lines.forEach(
+        (line, at) =>
+          line.goesOn || form.setValue(`lines.${at}.locationId`, locationId, { shouldValidate: true }),
+      ),
+  );
 }
 
 /** `25 of L-0219 to C-14`, `15 of L-0233 on to anodize`. */
@@ -138,7 +188,8 @@ function movedWords(asked: InputOf<typeof releasePieces>, gate: Gate): string[] 
     const line = gate.lines.find((one) => one.lineId === lineId);
     const place = gate.locations.find((one) => one.id === locationId)?.name;
     const to = line?.nextProcess ? `on to ${PROCESS_WORDS[line.nextProcess]}` : `to ${place ?? 'stock'}`;
-    const names = line?.named.filter((piece) => pieceIds.includes(piece.id)).map((piece) => piece.serial) ?? [];
+    const names =
+      line?.named.filter((piece) => pieceIds.includes(piece.id)).map((piece) => piece.serial) ?? [];
     return `${pieces} of ${line?.lotNumber ?? 'the lot'}${names.length > 0 ? ` (${listWords(names)})` : ''}, ${line?.partNumber ?? ''} ${line?.partName ?? ''}, ${to}`;
   });
 }

@@ -21,13 +21,22 @@ export function ReleaseScreen({ batchId }: { batchId: string }) {
   const mayRelease = useMay('stock.release');
   const [released, setReleased] = useState<readonly Released[]>([]);
   const { lines } = data;
-  const sum = (of: (line: (typeof lines)[number]) => number) => lines.reduce((all, line) => all + of(line), 0);
+  const sum = (of: (line: (typeof lines)[number]) => number) =>
+    lines.reduce((all, line) => all + of(line), 0);
   const mayPass = sum((line) => line.mayPass);
   const cells = [
     { caption: 'From', value: data.processor },
-    { caption: 'May pass now', value: <Pieces count={mayPass} of={sum((line) => line.pieces) - sum((line) => line.released)} /> },
-    { caption: 'Released before', value: <Pieces count={sum((line) => line.released)} of={sum((line) => line.pieces)} /> },
-    ...data.assemblies.slice(0, 2).map((one) => ({ caption: one.name, value: <Pieces count={one.ready} of={one.needed} /> })),
+    {
+      caption: 'May pass now',
+      value: <Pieces count={mayPass} of={sum((line) => line.pieces) - sum((line) => line.released)} />,
+    },
+    {
+      caption: 'Released before',
+      value: <Pieces count={sum((line) => line.released)} of={sum((line) => line.pieces)} />,
+    },
+    ...data.assemblies
+      .slice(0, 2)
+      .map((one) => ({ caption: one.name, value: <Pieces count={one.ready} of={one.needed} /> })),
   ];
   return (
     <>
@@ -35,13 +44,32 @@ export function ReleaseScreen({ batchId }: { batchId: string }) {
       <PageHead
         tag={<BatchTag stage={data.stage} number={data.number} size="head" href={`/batches/${batchId}`} />}
         cells={<TitleCells cells={cells} />}
-        actions={sum((line) => line.released) > 0 && <ButtonLink href={`/batches/${batchId}/labels`}>Labels</ButtonLink>}
+        actions={
+          sum((line) => line.released) > 0 && (
+            <ButtonLink href={`/batches/${batchId}/labels`}>Labels</ButtonLink>
+          )
+        }
       />
       {released.length > 0 && <ReleaseDone batchId={batchId} released={released} />}
       <Section title="The gate" note="counted in, proved, nothing on hold, paid">
-        {!data.dispatched && <Empty says={`${data.number} has not left yet.`} comes="Nothing of it can be released before it is back." action={<ButtonLink look="word" href={`/batches/${batchId}`}>To the batch</ButtonLink>} />}
+        {!data.dispatched && (
+          <Empty
+            says={`${data.number} has not left yet.`}
+            comes="Nothing of it can be released before it is back."
+            action={
+              <ButtonLink look="word" href={`/batches/${batchId}`}>
+                To the batch
+              </ButtonLink>
+            }
+          />
+        )}
         {data.dispatched && (
-          <ReleaseForm key={sum((line) => line.released)} gate={data} mayRelease={mayRelease} onReleased={(one) => setReleased((before) => [...before, one])} />
+          <ReleaseForm
+            key={sum((line) => line.released)}
+            gate={data}
+            mayRelease={mayRelease}
+            onReleased={(one) => setReleased((before) => [...before, one])}
+          />
         )}
       </Section>
     </>

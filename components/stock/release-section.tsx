@@ -13,7 +13,14 @@ import { Cell, Row, Table } from '@/components/ui/table';
 import { PROCESS_WORDS } from '@/lib/trade/process';
 import { getGate, listReleases } from '@/lib/stock/contract';
 
-const COLUMNS = [{ says: 'When' }, { says: 'Lot' }, { says: 'Part' }, { says: 'Pieces', right: true }, { says: 'To' }, { says: 'By' }];
+const COLUMNS = [
+  { says: 'When' },
+  { says: 'Lot' },
+  { says: 'Part' },
+  { says: 'Pieces', right: true },
+  { says: 'To' },
+  { says: 'By' },
+];
 
 /** What passed the gate of one batch and what may pass now, on its page. */
 export function ReleaseSection({ batchId }: { batchId: string }) {
@@ -45,7 +52,12 @@ export function ReleaseSection({ batchId }: { batchId: string }) {
     >
       {isPending && <Loading rows={2} label="Loading releases" />}
       {error && <Failing says="The releases could not be read." again={error.message} />}
-      {data && rows.length === 0 && <Empty says="Nothing is released yet." comes="Pieces pass when they are counted in, proved, not on hold and paid." />}
+      {data && rows.length === 0 && (
+        <Empty
+          says="Nothing is released yet."
+          comes="Pieces pass when they are counted in, proved, not on hold and paid."
+        />
+      )}
       {rows.length > 0 && (
         <Table label="Released of this batch" columns={COLUMNS} dense>
           {rows.map((row) => (
@@ -59,12 +71,16 @@ export function ReleaseSection({ batchId }: { batchId: string }) {
                 </Link>
               </Cell>
               <Cell>
-                <span className="num">{row.partNumber}</span> <span className="text-quiet">rev {row.partRevision}</span>
+                <span className="num">{row.partNumber}</span>{' '}
+                <span className="text-quiet">rev {row.partRevision}</span>
               </Cell>
               <Cell figure head="Pieces">
                 {row.pieces}
               </Cell>
-              <Cell head="To">{row.location ?? (row.nextProcess ? `on to ${PROCESS_WORDS[row.nextProcess]}` : 'the next step')}</Cell>
+              <Cell head="To">
+                {row.location ??
+                  (row.nextProcess ? `on to ${PROCESS_WORDS[row.nextProcess]}` : 'the next step')}
+              </Cell>
               <Cell quiet>{row.releasedBy}</Cell>
             </Row>
           ))}

@@ -16,8 +16,28 @@ interface SpotPiecesProps {
 /** How many, or which by name. */
 export function SpotPieces({ form, label, max, named }: SpotPiecesProps) {
   const error = form.formState.errors.pieces?.message;
-  if (named.length > 0) return <CheckboxGroup label={label} error={error} options={named.map((piece) => ({ value: piece.id, says: <span className="num">{piece.serial}</span> }))} {...form.register('names')} />;
-  return <PieceCounter {...form.register('pieces')} label={label} className="w-44" min={1} max={max} error={error} />;
+  if (named.length > 0)
+    return (
+      <CheckboxGroup
+        label={label}
+        error={error}
+        options={named.map((piece) => ({
+          value: piece.id,
+          says: <span className="num">{piece.serial}</span>,
+        }))}
+        {...form.register('names')}
+      />
+    );
+  return (
+    <PieceCounter
+      {...form.register('pieces')}
+      label={label}
+      className="w-44"
+      min={1}
+      max={max}
+      error={error}
+    />
+  );
 }
 
 /** What was refused and belongs to no field. */

@@ -30,7 +30,8 @@ export function StockLine({ row, span }: StockLineProps) {
           <Link href={`/parts/${row.partId}`} className="num font-semibold [overflow-wrap:anywhere]">
             {row.partNumber}
           </Link>{' '}
-          <span className="whitespace-nowrap text-quiet">rev {row.partRevision}</span> <span className="font-cond">{row.partName}</span>
+          <span className="whitespace-nowrap text-quiet">rev {row.partRevision}</span>{' '}
+          <span className="font-cond">{row.partName}</span>
         </Cell>
         <Cell>
           <Link href={`/lots/${row.lotId}`} className="num font-semibold">
@@ -51,7 +52,10 @@ export function StockLine({ row, span }: StockLineProps) {
           {(mayFit || mayMove) && (
             <Button look="word" aria-expanded={open} aria-controls={openId} onClick={() => setOpen(!open)}>
               {open ? 'Close' : openWords(mayFit, mayMove)}
-              <span className="sr-only"> {row.lotNumber} in {row.location}</span>
+              <span className="sr-only">
+                {' '}
+                {row.lotNumber} in {row.location}
+              </span>
             </Button>
           )}
         </Cell>
@@ -79,7 +83,10 @@ interface OpenSpotProps {
 }
 
 function OpenSpot({ row, mayFit, mayMove }: OpenSpotProps) {
-  const { data, error, isPending } = useLazyRead(getStockSpot, { lotId: row.lotId, locationId: row.locationId });
+  const { data, error, isPending } = useLazyRead(getStockSpot, {
+    lotId: row.lotId,
+    locationId: row.locationId,
+  });
   if (isPending) return <Loading rows={2} label="Loading what needs it" />;
   if (error) return <Failing says="What can be done with it could not be read." again={error.message} />;
   const spot = { lotId: row.lotId, lotNumber: row.lotNumber, locationId: row.locationId, spot: data };

@@ -21,11 +21,21 @@ export interface StockFilter {
   locationId?: string;
 }
 
-const COLUMNS = [{ says: 'Part' }, { says: 'Lot' }, { says: 'Condition' }, { says: 'Heat' }, { says: 'Place' }, { says: 'Pieces', right: true }, { says: 'What can be done', hidden: true }];
+const COLUMNS = [
+  { says: 'Part' },
+  { says: 'Lot' },
+  { says: 'Condition' },
+  { says: 'Heat' },
+  { says: 'Place' },
+  { says: 'Pieces', right: true },
+  { says: 'What can be done', hidden: true },
+];
 
 /** Everything that passed the gate and is not fitted yet, by part, lot and place. */
 export function StockScreen({ filter }: { filter: StockFilter }) {
-  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listStock, { ...filter });
+  const { data, error, isPending, hasNextPage, fetchNextPage, isFetchingNextPage } = usePages(listStock, {
+    ...filter,
+  });
   const rows = data?.pages.flatMap((page) => page.rows) ?? [];
   return (
     <>
@@ -68,12 +78,27 @@ function PlaceFilter({ chosen }: { chosen: string | undefined }) {
       empty="Every place"
       value={chosen ?? ''}
       onChange={(event) => choose(event.currentTarget.value)}
-      options={data.rows.filter((place) => !place.closed || place.pieces > 0).map(({ id, name, pieces }) => ({ value: id, says: `${name}, ${pieces} pc` }))}
+      options={data.rows
+        .filter((place) => !place.closed || place.pieces > 0)
+        .map(({ id, name, pieces }) => ({ value: id, says: `${name}, ${pieces} pc` }))}
     />
   );
 }
 
 function NoStock({ isFiltered }: { isFiltered: boolean }) {
-  if (isFiltered) return <Empty says="Nothing in stock is like that." comes="Look at the number again, or at every place." action={<Link href="/stock">Show all stock</Link>} />;
-  return <Empty says="Nothing is in stock." comes="Pieces come here through the gate of a batch: counted in, proved and paid." action={<Link href="/batches">To the batches</Link>} />;
+  if (isFiltered)
+    return (
+      <Empty
+        says="Nothing in stock is like that."
+        comes="Look at the number again, or at every place."
+        action={<Link href="/stock">Show all stock</Link>}
+      />
+    );
+  return (
+    <Empty
+      says="Nothing is in stock."
+      comes="Pieces come here through the gate of a batch: counted in, proved and paid."
+      action={<Link href="/batches">To the batches</Link>}
+    />
+  );
 }

@@ -14,13 +14,28 @@ const MOST_BATCHES = 3;
 export function AssemblyWaits({ tideline }: { tideline: Tideline }) {
   const { assemblies } = tideline;
   return (
-    <Section title="What each assembly waits for" action={assemblies.length > 0 ? <span className="text-second text-quiet">pieces ready of pieces needed</span> : undefined}>
+    <Section
+      title="What each assembly waits for"
+      action={
+        assemblies.length > 0 ? (
+          <span className="text-second text-quiet">pieces ready of pieces needed</span>
+        ) : undefined
+      }
+    >
       {assemblies.length === 0 ? (
         <p className="py-3 text-quiet">
-          No assembly is open. Enter one with the parts it needs, and this list says what it waits for. <Link href="/assemblies">Assemblies</Link>
+          No assembly is open. Enter one with the parts it needs, and this list says what it waits for.{' '}
+          <Link href="/assemblies">Assemblies</Link>
         </p>
       ) : (
-        <Table keep label="What each assembly waits for" columns={['Assembly', 'Needed', 'Ready', 'Pieces', 'Batches'].map((says) => ({ says, hidden: true }))}>
+        <Table
+          keep
+          label="What each assembly waits for"
+          columns={['Assembly', 'Needed', 'Ready', 'Pieces', 'Batches'].map((says) => ({
+            says,
+            hidden: true,
+          }))}
+        >
           {assemblies.map((assembly) => (
             <AssemblyRow key={assembly.id} assembly={assembly} tideline={tideline} />
           ))}
@@ -37,13 +52,30 @@ function AssemblyRow({ assembly, tideline }: { assembly: AssemblyWait; tideline:
   return (
     <Row>
       <Cell>
-        <Link href={`/assemblies/${assembly.id}`} className="font-cond text-tag font-semibold no-underline hover:underline">
+        <Link
+          href={`/assemblies/${assembly.id}`}
+          className="text-tag font-cond font-semibold no-underline hover:underline"
+        >
           {assembly.name}
         </Link>
       </Cell>
-      <Cell figure>{assembly.neededOn && <span className={isLate ? 'font-semibold text-held-ink' : ''}>{shortDayWords(assembly.neededOn, clock)}</span>}</Cell>
+      <Cell figure>
+        {assembly.neededOn && (
+          <span className={isLate ? 'font-semibold text-held-ink' : ''}>
+            {shortDayWords(assembly.neededOn, clock)}
+          </span>
+        )}
+      </Cell>
       <Cell>
-        <SteelRule small to={Math.max(assembly.needed, 1)} tick={tick} number={tick * 5} value={assembly.ready} width={104} says={`${assembly.ready} of ${assembly.needed} pieces ready`} />
+        <SteelRule
+          small
+          to={Math.max(assembly.needed, 1)}
+          tick={tick}
+          number={tick * 5}
+          value={assembly.ready}
+          width={104}
+          says={`${assembly.ready} of ${assembly.needed} pieces ready`}
+        />
       </Cell>
       <Cell figure right>
         {assembly.ready}/{assembly.needed}
@@ -51,12 +83,19 @@ function AssemblyRow({ assembly, tideline }: { assembly: AssemblyWait; tideline:
       <Cell>
         <span className="flex flex-wrap gap-x-3">
           {assembly.batches.slice(0, MOST_BATCHES).map((batch) => (
-            <Link key={batch.id} href={`/batches/${batch.id}`} className={`inline-flex items-center gap-1 no-underline ${STAGE_TONES[batch.stage]}`} aria-label={`${batch.number}, ${STAGE_WORDS[batch.stage]}, ${batch.pieces} pieces`}>
+            <Link
+              key={batch.id}
+              href={`/batches/${batch.id}`}
+              className={`inline-flex items-center gap-1 no-underline ${STAGE_TONES[batch.stage]}`}
+              aria-label={`${batch.number}, ${STAGE_WORDS[batch.stage]}, ${batch.pieces} pieces`}
+            >
               <StageMark stage={batch.stage} size={12} />
               <span className="num font-semibold text-(--ti)">{batch.number.replace(/^B-/, '')}</span>
             </Link>
           ))}
-          {assembly.batches.length > MOST_BATCHES && <span className="text-quiet">and {assembly.batches.length - MOST_BATCHES} more</span>}
+          {assembly.batches.length > MOST_BATCHES && (
+            <span className="text-quiet">and {assembly.batches.length - MOST_BATCHES} more</span>
+          )}
         </span>
       </Cell>
     </Row>

@@ -13,7 +13,14 @@ export function Ground({ scale, height }: { scale: Scale; height: number }) {
           <rect key={day.day} x={day.x} width={dayPx} height={height} fill="var(--deep)" opacity="0.75" />
         ))}
       {[6, 12, 19, 27].map((back, at) => (
-        <path key={back} d={wave(todayX - back, height)} fill="none" stroke="var(--line)" strokeWidth="0.8" opacity={0.55 - at * 0.12} />
+        <path
+          key={back}
+          d={wave(todayX - back, height)}
+          fill="none"
+          stroke="var(--line)"
+          strokeWidth="0.8"
+          opacity={0.55 - at * 0.12}
+        />
       ))}
       <path d={`M${todayX} 0V${height}`} stroke="var(--ink)" strokeWidth="2" />
     </svg>

@@ -4,13 +4,32 @@ import type { Scale } from '@/lib/tideline/scale';
 const MIDDLE_PX = 12;
 
 /** What is drawn beside the tags: late strips with a tick a day, threads to the assemblies, notches and broken promises. */
-export function LaneStrings({ tags, width, height, scale }: { tags: readonly PlacedTag[]; width: number; height: number; scale: Scale }) {
+export function LaneStrings({
+  tags,
+  width,
+  height,
+  scale,
+}: {
+  tags: readonly PlacedTag[];
+  width: number;
+  height: number;
+  scale: Scale;
+}) {
   return (
     <svg aria-hidden="true" width={width} height={height} className="absolute inset-0">
       {tags.map((tag) => (
         <g key={tag.batch.id}>
-          {tag.late && <LateStrip fromX={tag.late.fromX} toX={scale.todayX} y={tagTop(tag.row)} dayPx={scale.dayPx} />}
-          {tag.string?.knotX && <Thread fromX={tag.string.fromX} toX={tag.string.labelSide === 'left' ? tag.string.labelX - 4 : tag.string.knotX - 4} knotX={tag.string.knotX} y={tagTop(tag.row) + MIDDLE_PX} />}
+          {tag.late && (
+            <LateStrip fromX={tag.late.fromX} toX={scale.todayX} y={tagTop(tag.row)} dayPx={scale.dayPx} />
+          )}
+          {tag.string?.knotX && (
+            <Thread
+              fromX={tag.string.fromX}
+              toX={tag.string.labelSide === 'left' ? tag.string.labelX - 4 : tag.string.knotX - 4}
+              knotX={tag.string.knotX}
+              y={tagTop(tag.row) + MIDDLE_PX}
+            />
+          )}
         </g>
       ))}
     </svg>
@@ -19,7 +38,10 @@ export function LaneStrings({ tags, width, height, scale }: { tags: readonly Pla
 
 function LateStrip({ fromX, toX, y, dayPx }: { fromX: number; toX: number; y: number; dayPx: number }) {
   if (toX <= fromX) return null;
-  const ticks = Array.from({ length: Math.floor((toX - fromX) / dayPx) }, (_, at) => `M${fromX + (at + 1) * dayPx} ${y + 19}v${(at + 1) % 5 === 0 ? -8 : -4}`).join('');
+  const ticks = Array.from(
+    { length: Math.floor((toX - fromX) / dayPx) },
+    (_, at) => `M${fromX + (at + 1) * dayPx} ${y + 19}v${(at + 1) % 5 === 0 ? -8 : -4}`,
+  ).join('');
   return (
     <g stroke="var(--held-ink)">
       <rect x={fromX} y={y + 5} width={toX - fromX} height="14" fill="var(--held-wash)" strokeWidth="1" />

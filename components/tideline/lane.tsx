@@ -62,9 +62,17 @@ function LaneLabel({ processor, tideline, room }: LaneLabelProps) {
   const back = here.filter((batch) => ['returned', 'proved', 'settled'].includes(batch.stage)).length;
   const held = here.filter((batch) => batch.stage === 'held').length;
   const pieces = here.reduce((sum, batch) => sum + batch.pieces, 0);
-  const counts = [out > 0 && `${out} out`, back > 0 && `${back} back`, held > 0 && `${held} held`, `${pieces} pc`].filter(Boolean).join(', ');
+  const counts = [
+    out > 0 && `${out} out`,
+    back > 0 && `${back} back`,
+    held > 0 && `${held} held`,
+    `${pieces} pc`,
+  ]
+    .filter(Boolean)
+    .join(', ');
   const clock = { zone: tideline.zone, now: new Date(tideline.now) };
-  const endsSoon = processor.approvedTo !== null && daysBetween(tideline.today, processor.approvedTo) <= ENDS_SOON_DAYS;
+  const endsSoon =
+    processor.approvedTo !== null && daysBetween(tideline.today, processor.approvedTo) <= ENDS_SOON_DAYS;
   return (
     <>
       <h2 className="truncate text-sub font-semibold">
@@ -72,15 +80,21 @@ function LaneLabel({ processor, tideline, room }: LaneLabelProps) {
           {processor.name}
         </Link>
       </h2>
-      {room >= 92 && <p className="truncate font-cond text-caption text-quiet">{processWords(processor.processes)}</p>}
+      {room >= 92 && (
+        <p className="truncate font-cond text-caption text-quiet">{processWords(processor.processes)}</p>
+      )}
       <p className="font-cond text-caption text-quiet">{counts}</p>
       {processor.approvedTo !== null && (room >= 62 || endsSoon) && (
-        <p className={`font-cond ${endsSoon ? 'text-tag font-semibold text-dispatched-ink' : 'text-caption text-quiet'}`}>
-          {processor.approvedTo < tideline.today ? 'approval ended' : 'approved to'} {shortDayWords(processor.approvedTo, clock)}
+        <p
+          className={`font-cond ${endsSoon ? 'text-tag font-semibold text-dispatched-ink' : 'text-caption text-quiet'}`}
+        >
+          {processor.approvedTo < tideline.today ? 'approval ended' : 'approved to'}{' '}
+          {shortDayWords(processor.approvedTo, clock)}
         </p>
       )}
     </>
   );
 }
 
-const processWords = (processes: readonly string[]): string => processes.map((name) => PROCESS_WORDS[name as Process] ?? name).join(', ');
+const processWords = (processes: readonly string[]): string =>
+  processes.map((name) => PROCESS_WORDS[name as Process] ?? name).join(', ');

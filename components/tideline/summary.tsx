@@ -12,7 +12,8 @@ export function Summary({ tideline }: { tideline: Tideline }) {
   const pieces = out.reduce((sum, batch) => sum + batch.pieces, 0);
   return (
     <p className="text-second text-quiet">
-      <strong>{out.length}</strong> {out.length === 1 ? 'batch' : 'batches'} out, <strong>{pieces.toLocaleString('en-US')}</strong> pieces
+      <strong>{out.length}</strong> {out.length === 1 ? 'batch' : 'batches'} out,{' '}
+      <strong>{pieces.toLocaleString('en-US')}</strong> pieces
       {(late > 0 || undated > 0) && ': '}
       {late > 0 && <strong className="text-held-ink">{late} late</strong>}
       {late > 0 && undated > 0 && ', '}

@@ -38,20 +38,40 @@ export function TagLink({ tag, scale, today }: TagLinkProps) {
         <TagMarks tag={tag} />
       </div>
       {late && (
-        <span aria-hidden="true" className="absolute" style={{ left: Math.max(tag.x + tag.width, scale.todayX), top: top + 1 }}>
+        <span
+          aria-hidden="true"
+          className="absolute"
+          style={{ left: Math.max(tag.x + tag.width, scale.todayX), top: top + 1 }}
+        >
           <LateFlag days={late.days} />
         </span>
       )}
       {outside && (
-        <span aria-hidden="true" className={`absolute bg-paper/80 px-1 font-cond text-string leading-6 whitespace-nowrap ${batch.stage === 'held' ? 'text-tag font-semibold text-held-ink' : 'text-quiet'}`} style={{ left: afterX, top }}>
-          {batch.nonconformance && batch.stage === 'held' ? <Link href={`/nonconformances/${batch.nonconformance.id}`} tabIndex={-1}>{outside}</Link> : outside}
+        <span
+          aria-hidden="true"
+          className={`absolute bg-paper/80 px-1 font-cond text-string leading-6 whitespace-nowrap ${batch.stage === 'held' ? 'text-tag font-semibold text-held-ink' : 'text-quiet'}`}
+          style={{ left: afterX, top }}
+        >
+          {batch.nonconformance && batch.stage === 'held' ? (
+            <Link href={`/nonconformances/${batch.nonconformance.id}`} tabIndex={-1}>
+              {outside}
+            </Link>
+          ) : (
+            outside
+          )}
         </span>
       )}
       {string && (
-        <span aria-hidden="true" className={`absolute font-cond leading-6 whitespace-nowrap ${string.tooLate ? 'text-held-ink' : ''}`} style={{ left: string.labelX, top }}>
+        <span
+          aria-hidden="true"
+          className={`absolute font-cond leading-6 whitespace-nowrap ${string.tooLate ? 'text-held-ink' : ''}`}
+          style={{ left: string.labelX, top }}
+        >
           <span className="text-tag font-semibold">{string.name}</span>{' '}
           <span className={`text-string ${string.tooLate ? '' : 'text-quiet'}`}>
-            {string.tooLate ? `needed ${string.day}${agoWords(batch.assembly?.neededOn ?? null, today)}` : string.day}
+            {string.tooLate
+              ? `needed ${string.day}${agoWords(batch.assembly?.neededOn ?? null, today)}`
+              : string.day}
           </span>
         </span>
       )}
@@ -82,6 +102,8 @@ function TagMarks({ tag }: { tag: PlacedTag }) {
 
 function sentenceOf({ batch, after }: PlacedTag): string {
   const clock = { zone: 'UTC', now: new Date() };
-  const assembly = batch.assembly ? `holds up ${batch.assembly.name}${batch.assembly.neededOn ? `, needed ${shortDayWords(batch.assembly.neededOn, clock)}` : ''}` : '';
+  const assembly = batch.assembly
+    ? `holds up ${batch.assembly.name}${batch.assembly.neededOn ? `, needed ${shortDayWords(batch.assembly.neededOn, clock)}` : ''}`
+    : '';
   return [after ?? '', assembly].filter(Boolean).join(', ');
 }

@@ -8,7 +8,15 @@ import { daysLate } from '@/lib/tideline/lateness';
 
 /** The same batches as a table: everything the line draws, in words. */
 export function TidelineList({ tideline }: { tideline: Tideline }) {
-  const columns = [{ says: 'Batch' }, { says: 'What' }, { says: 'Out' }, { says: 'Promised' }, { says: 'Back', right: true }, { says: 'Late', right: true }, { says: 'Holds up' }];
+  const columns = [
+    { says: 'Batch' },
+    { says: 'What' },
+    { says: 'Out' },
+    { says: 'Promised' },
+    { says: 'Back', right: true },
+    { says: 'Late', right: true },
+    { says: 'Holds up' },
+  ];
   return (
     <Table label="Batches not yet in stock, by processor" columns={columns}>
       {tideline.lanes.map((lane) => {
@@ -31,8 +39,12 @@ function BatchRow({ batch, tideline }: { batch: TidelineBatch; tideline: Tidelin
         <BatchTag stage={batch.stage} number={batch.number} href={`/batches/${batch.id}`} size="row" />
       </Cell>
       <Cell>{batch.contents}</Cell>
-      <Cell figure head="Out">{batch.dispatchedOn && shortDayWords(batch.dispatchedOn, clock)}</Cell>
-      <Cell figure head="Promised">{batch.promisedOn ? shortDayWords(batch.promisedOn, clock) : batch.dispatchedOn && 'no date yet'}</Cell>
+      <Cell figure head="Out">
+        {batch.dispatchedOn && shortDayWords(batch.dispatchedOn, clock)}
+      </Cell>
+      <Cell figure head="Promised">
+        {batch.promisedOn ? shortDayWords(batch.promisedOn, clock) : batch.dispatchedOn && 'no date yet'}
+      </Cell>
       <Cell figure right head="Back">
         {batch.piecesBack} of {batch.pieces}
       </Cell>
@@ -43,7 +55,9 @@ function BatchRow({ batch, tideline }: { batch: TidelineBatch; tideline: Tidelin
         {batch.assembly && (
           <>
             <Link href={`/assemblies/${batch.assembly.id}`}>{batch.assembly.name}</Link>
-            {batch.assembly.neededOn && <span className="text-quiet"> {shortDayWords(batch.assembly.neededOn, clock)}</span>}
+            {batch.assembly.neededOn && (
+              <span className="text-quiet"> {shortDayWords(batch.assembly.neededOn, clock)}</span>
+            )}
           </>
         )}
       </Cell>

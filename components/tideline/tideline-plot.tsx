@@ -22,27 +22,55 @@ export function TidelinePlot({ tideline }: { tideline: Tideline }) {
   const [dayPx, setDayPx] = useState<DayWidth>(18);
   const now = useQuarterHour(tideline.now);
   const scale = useMemo(
-    () => scaleFor({ widthPx: Math.max(boxPx - LABEL_PX, 400), dayPx, today: tideline.today, dayShare: shareOfDay(now, tideline.zone) }),
+    () =>
+      scaleFor({
+        widthPx: Math.max(boxPx - LABEL_PX, 400),
+        dayPx,
+        today: tideline.today,
+        dayShare: shareOfDay(now, tideline.zone),
+      }),
     [boxPx, dayPx, now, tideline.today, tideline.zone],
   );
   const lanes = useMemo(() => layOut(tideline, scale), [tideline, scale]);
   const height = lanes.reduce((sum, lane) => sum + lane.height, 0);
-  const zoom = (by: number) => setDayPx(DAY_WIDTHS[Math.min(Math.max(DAY_WIDTHS.indexOf(dayPx) + by, 0), DAY_WIDTHS.length - 1)] ?? 18);
+  const zoom = (by: number) =>
+    setDayPx(DAY_WIDTHS[Math.min(Math.max(DAY_WIDTHS.indexOf(dayPx) + by, 0), DAY_WIDTHS.length - 1)] ?? 18);
 
   return (
     <div ref={box} className="relative overflow-hidden" onKeyDown={walkTags}>
       <div className="absolute top-0 left-0 z-10 flex gap-1 print:hidden">
-        <Button size="small" shortcut="-" onClick={() => zoom(-1)} aria-label="Show more days" notNow={dayPx === DAY_WIDTHS[0] ? 'All days are shown' : undefined} reasonAt="elsewhere">
+        <Button
+          size="small"
+          shortcut="-"
+          onClick={() => zoom(-1)}
+          aria-label="Show more days"
+          notNow={dayPx === DAY_WIDTHS[0] ? 'All days are shown' : undefined}
+          reasonAt="elsewhere"
+        >
           −
         </Button>
-        <Button size="small" shortcut="+" onClick={() => zoom(1)} aria-label="Show fewer days" notNow={dayPx === DAY_WIDTHS.at(-1) ? 'As near as it goes' : undefined} reasonAt="elsewhere">
+        <Button
+          size="small"
+          shortcut="+"
+          onClick={() => zoom(1)}
+          aria-label="Show fewer days"
+          notNow={dayPx === DAY_WIDTHS.at(-1) ? 'As near as it goes' : undefined}
+          reasonAt="elsewhere"
+        >
           +
         </Button>
       </div>
       <div className="relative" style={{ marginLeft: LABEL_PX, height: 48 }}>
         <DayTicks scale={scale} />
-        <p className="absolute top-0 z-10 bg-ink px-2 font-cond text-tag leading-[21px] font-semibold whitespace-nowrap text-paper" style={{ left: scale.todayX - 1 }} suppressHydrationWarning>
-          {dayWords(tideline.today, { zone: tideline.zone, now })} <span className="num" suppressHydrationWarning>{timeWords(now, tideline.zone)}</span>
+        <p
+          className="text-tag absolute top-0 z-10 bg-ink px-2 font-cond leading-[21px] font-semibold whitespace-nowrap text-paper"
+          style={{ left: scale.todayX - 1 }}
+          suppressHydrationWarning
+        >
+          {dayWords(tideline.today, { zone: tideline.zone, now })}{' '}
+          <span className="num" suppressHydrationWarning>
+            {timeWords(now, tideline.zone)}
+          </span>
         </p>
       </div>
       <div className="relative border-y-heavy border-ink" style={{ height: height + 3 }}>

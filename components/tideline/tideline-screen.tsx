@@ -36,11 +36,18 @@ export function TidelineScreen({ roles, view }: { roles: readonly Role[]; view: 
             ]}
           />
         </div>
-        <a data-key="v" data-key-says={view === 'list' ? 'on the line' : 'as a list'} href={view === 'list' ? '/' : '/?view=list'} className="sr-only">
+        <a
+          data-key="v"
+          data-key-says={view === 'list' ? 'on the line' : 'as a list'}
+          href={view === 'list' ? '/' : '/?view=list'}
+          className="sr-only"
+        >
           {view === 'list' ? 'Show on the line' : 'Show as a list'}
         </a>
       </div>
-      <div className="max-md:hidden">{view === 'list' ? <TidelineList tideline={tideline} /> : <TidelinePlot tideline={tideline} />}</div>
+      <div className="max-md:hidden">
+        {view === 'list' ? <TidelineList tideline={tideline} /> : <TidelinePlot tideline={tideline} />}
+      </div>
       <div className="md:hidden">
         <PhoneTideline tideline={tideline} />
       </div>

@@ -9,11 +9,33 @@ import type { Waiting } from '@/lib/tideline/what-waits';
 /** One line a batch, worst harm first, with the one thing to do about it. */
 export function WaitsForMe({ waiting }: { waiting: readonly Waiting[] }) {
   return (
-    <Section id="for-me" title="What waits for me" note={waiting.length > 0 ? `${waiting.length}, worst harm first` : undefined} action={waiting.length > 0 ? <span className="max-md:hidden"><Kbd keys="J K" says="move" /> <Kbd keys="Enter" says="open" /></span> : undefined}>
+    <Section
+      id="for-me"
+      title="What waits for me"
+      note={waiting.length > 0 ? `${waiting.length}, worst harm first` : undefined}
+      action={
+        waiting.length > 0 ? (
+          <span className="max-md:hidden">
+            <Kbd keys="J K" says="move" /> <Kbd keys="Enter" says="open" />
+          </span>
+        ) : undefined
+      }
+    >
       {waiting.length === 0 ? (
-        <p className="py-3 text-quiet">Nothing waits for you. Late batches, questions from processors and papers to prove will stand here, worst first.</p>
+        <p className="py-3 text-quiet">
+          Nothing waits for you. Late batches, questions from processors and papers to prove will stand here,
+          worst first.
+        </p>
       ) : (
-        <Table label="What waits for me" columns={[{ says: 'Batch', hidden: true }, { says: 'What', hidden: true }, { says: 'For', hidden: true }, { says: 'Do', right: true, hidden: true }]}>
+        <Table
+          label="What waits for me"
+          columns={[
+            { says: 'Batch', hidden: true },
+            { says: 'What', hidden: true },
+            { says: 'For', hidden: true },
+            { says: 'Do', right: true, hidden: true },
+          ]}
+        >
           {waiting.map(({ batch, what, why, verb, href }) => (
             <Row key={batch.id}>
               <Cell>

@@ -4,7 +4,9 @@ import type { KeyboardEvent } from 'react';
 export function walkTags(event: KeyboardEvent<HTMLElement>): void {
   const step = STEPS[event.key];
   if (!step || !(document.activeElement instanceof HTMLAnchorElement)) return;
-  const links = [...event.currentTarget.querySelectorAll<HTMLAnchorElement>('ol ol a[href]:not([tabindex="-1"])')];
+  const links = [
+    ...event.currentTarget.querySelectorAll<HTMLAnchorElement>('ol ol a[href]:not([tabindex="-1"])'),
+  ];
   const here = document.activeElement.getBoundingClientRect();
   const next = links
     .filter((link) => link !== document.activeElement)

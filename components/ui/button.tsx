@@ -25,7 +25,18 @@ interface ButtonProps extends Look, Omit<ComponentProps<'button'>, 'className' |
 }
 
 export function Button(props: ButtonProps) {
-  const { look, size, shortcut, className, onClick, busy = false, busyLabel, notNow, reasonAt = 'beside', ...rest } = props;
+  const {
+    look,
+    size,
+    shortcut,
+    className,
+    onClick,
+    busy = false,
+    busyLabel,
+    notNow,
+    reasonAt = 'beside',
+    ...rest
+  } = props;
   const { children, type = 'button', ...attributes } = rest;
   const reasonId = useId();
   const held = useHeldUntilDone();
@@ -58,7 +69,9 @@ export function Button(props: ButtonProps) {
 
   if (!notNow || reasonAt === 'elsewhere') return withShortcut(button, look, shortcut);
   return (
-    <span className={`inline-flex gap-3 ${reasonAt === 'below' ? 'flex-col items-stretch gap-1.5' : 'items-center'}`}>
+    <span
+      className={`inline-flex gap-3 ${reasonAt === 'below' ? 'flex-col items-stretch gap-1.5' : 'items-center'}`}
+    >
       {button}
       <span id={reasonId} className="text-second text-quiet">
         {notNow}
@@ -103,7 +116,11 @@ function shortcutAttributes(shortcut: string | undefined) {
   return shortcut ? { 'data-key': shortcut.toLowerCase(), 'aria-keyshortcuts': shortcut } : {};
 }
 
-function buttonClass({ look = 'outlined', size = 'normal', className = '' }: { [K in keyof Look]?: Look[K] | undefined }) {
+function buttonClass({
+  look = 'outlined',
+  size = 'normal',
+  className = '',
+}: { [K in keyof Look]?: Look[K] | undefined }) {
   if (look === 'word') return `lw-word-button ${className}`;
   const looks = { primary: 'lw-btn-primary', outlined: '', stop: 'lw-btn-stop' };
   const sizes = { normal: '', small: 'lw-btn-small', big: 'lw-btn-big' };

@@ -14,7 +14,14 @@ export function Checkbox({ says, note, error, ...input }: CheckboxProps) {
   const id = useId();
   return (
     <span className="block">
-      <ChoiceLine type="checkbox" id={id} says={says} note={note} errorId={error && `${id}-error`} {...input} />
+      <ChoiceLine
+        type="checkbox"
+        id={id}
+        says={says}
+        note={note}
+        errorId={error && `${id}-error`}
+        {...input}
+      />
       {error && <FieldError id={`${id}-error`} says={error} />}
     </span>
   );
@@ -43,7 +50,16 @@ export function RadioGroup(props: ChoiceGroupProps) {
   return <Group type="radio" {...props} />;
 }
 
-function Group({ type, label, hint, error, className = '', options, chosen, ...input }: ChoiceGroupProps & ChoiceType) {
+function Group({
+  type,
+  label,
+  hint,
+  error,
+  className = '',
+  options,
+  chosen,
+  ...input
+}: ChoiceGroupProps & ChoiceType) {
   const id = useId();
   const name = input.name ?? id;
   return (
@@ -88,7 +104,7 @@ interface ChoiceLineProps extends ChoiceType, Tick {
 function ChoiceLine({ says, note, errorId, ...input }: ChoiceLineProps) {
   return (
     <label htmlFor={input.id} className="flex items-start gap-2 py-[5px] touch:min-h-12 touch:items-center">
-      <input {...input} className="lw-check touch:mt-0 mt-[1px]" aria-describedby={errorId} />
+      <input {...input} className="lw-check mt-[1px] touch:mt-0" aria-describedby={errorId} />
       <span>
         {says}
         {note && <span className="text-quiet"> {note}</span>}

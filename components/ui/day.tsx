@@ -1,4 +1,11 @@
-import { type CalendarDay, type Clock, dayWords, momentWords, shortDayWords, untilWords } from '@/lib/day-words';
+import {
+  type CalendarDay,
+  type Clock,
+  dayWords,
+  momentWords,
+  shortDayWords,
+  untilWords,
+} from '@/lib/day-words';
 
 interface DayProps {
   day: CalendarDay;

@@ -22,7 +22,16 @@ interface DialogProps {
  * Only for what cannot be taken back. The element of the platform holds the focus, gives it back, and needs no style
  * of its own in the page, which a strict content policy would refuse.
  */
-export function Dialog({ open, onClose, title, lead, children, actions, busy = false, onSubmit }: DialogProps) {
+export function Dialog({
+  open,
+  onClose,
+  title,
+  lead,
+  children,
+  actions,
+  busy = false,
+  onSubmit,
+}: DialogProps) {
   const element = useRef<HTMLDialogElement>(null);
   const titleId = useId();
   const leadId = useId();

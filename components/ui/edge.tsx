@@ -7,7 +7,11 @@ interface EdgeProps {
   className?: string;
 }
 
-const EDGES: Record<CheckLevel, string> = { stop: 'border-held', warn: 'border-dispatched', note: 'border-settled' };
+const EDGES: Record<CheckLevel, string> = {
+  stop: 'border-held',
+  warn: 'border-dispatched',
+  note: 'border-settled',
+};
 
 /** A paragraph with a coloured edge: what it says is in its words. */
 export function Edge({ level, children, className = '' }: EdgeProps) {

@@ -46,7 +46,10 @@ export function FieldError({ id, says }: { id: string; says: string }) {
 }
 
 /** What ties an input to its label, its hint and its fault. */
-export function fieldAttributes(id: string, { error, hint, frozen }: Pick<FieldWords, 'error' | 'hint' | 'frozen'>) {
+export function fieldAttributes(
+  id: string,
+  { error, hint, frozen }: Pick<FieldWords, 'error' | 'hint' | 'frozen'>,
+) {
   const below = error ? `${id}-error` : `${id}-hint`;
   return {
     id,
@@ -65,7 +68,17 @@ export interface TextFieldProps extends FieldWords, InputProps {
   id?: string;
 }
 
-export function TextField({ label, hint, error, frozen, className, unit, mono = false, id, ...input }: TextFieldProps) {
+export function TextField({
+  label,
+  hint,
+  error,
+  frozen,
+  className,
+  unit,
+  mono = false,
+  id,
+  ...input
+}: TextFieldProps) {
   const made = useId();
   const fieldId = id ?? made;
   const words = { label, hint, error, frozen };
@@ -112,7 +125,17 @@ export interface SelectOption {
   disabled?: boolean;
 }
 
-export function SelectField({ label, hint, error, frozen, className, empty, options, id, ...select }: SelectFieldProps) {
+export function SelectField({
+  label,
+  hint,
+  error,
+  frozen,
+  className,
+  empty,
+  options,
+  id,
+  ...select
+}: SelectFieldProps) {
   const made = useId();
   const fieldId = id ?? made;
   const words = { label, hint, error, frozen };

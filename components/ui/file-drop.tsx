@@ -17,7 +17,17 @@ interface FileDropProps {
   className?: string;
 }
 
-export function FileDrop({ label, onFiles, hint, error, accept, multiple, camera, disabled, className = '' }: FileDropProps) {
+export function FileDrop({
+  label,
+  onFiles,
+  hint,
+  error,
+  accept,
+  multiple,
+  camera,
+  disabled,
+  className = '',
+}: FileDropProps) {
   const id = useId();
   const [over, setOver] = useState(false);
   const depth = useRef(0);

@@ -16,7 +16,8 @@ interface NumberWords {
 export function numberField(words: NumberWords) {
   return z.union([z.string(), z.number()], `${words.name} is missing.`).transform((typed, issues) => {
     const read = readNumber(typed);
-    if (read === undefined) issues.addIssue({ code: 'custom', message: `${words.name} is missing. Enter a number.` });
+    if (read === undefined)
+      issues.addIssue({ code: 'custom', message: `${words.name} is missing. Enter a number.` });
     if (read !== null && read !== undefined) return read;
     if (read === null) issues.addIssue({ code: 'custom', message: notANumber(words) });
     return z.NEVER;
@@ -46,7 +47,9 @@ export function piecesField(name = 'Pieces') {
 /** A tick: what browsers, forms and programs send for yes and for no. */
 export const checkbox = z
   .union([z.boolean(), z.string(), z.null(), z.undefined()])
-  .transform((given) => given === true || (typeof given === 'string' && ['on', 'true', '1', 'yes'].includes(given)));
+  .transform(
+    (given) => given === true || (typeof given === 'string' && ['on', 'true', '1', 'yes'].includes(given)),
+  );
 
 /** One value, several or none: always a list. */
 export function list<Item extends z.ZodType>(item: Item) {

@@ -31,7 +31,7 @@ const FRAMES = [
 export function LoadNumber({ number }: { number: number }) {
   return (
     <span
-      className={`inline-flex h-5 min-w-[22px] items-center justify-center border-ink px-0.5 font-mono text-[0.78rem] font-semibold leading-none ${
+      className={`inline-flex h-5 min-w-[22px] items-center justify-center border-ink px-0.5 font-mono text-[0.78rem] leading-none font-semibold ${
         FRAMES[number - 1] ?? 'border'
       }`}
     >

@@ -19,13 +19,20 @@ const EVERYWHERE: readonly KeyLine[] = [
 /** All keys of the page that is open. */
 export function KeyHelp({ keys, onClose }: { keys: readonly KeyLine[] | null; onClose: () => void }) {
   return (
-    <Dialog open={keys !== null} onClose={onClose} title="Keys of this page" actions={<Button onClick={onClose}>Close</Button>}>
+    <Dialog
+      open={keys !== null}
+      onClose={onClose}
+      title="Keys of this page"
+      actions={<Button onClick={onClose}>Close</Button>}
+    >
       <dl className="grid grid-cols-[auto_1fr] items-baseline gap-x-5 gap-y-1.5">
         {[...EVERYWHERE, ...(keys ?? [])].map((line) => (
           <KeyRow key={line.keys} line={line} />
         ))}
       </dl>
-      <p className="pt-3 text-second text-quiet">No key signs, pays or dispatches. Single keys are switched off at your name.</p>
+      <p className="pt-3 text-second text-quiet">
+        No key signs, pays or dispatches. Single keys are switched off at your name.
+      </p>
     </Dialog>
   );
 }

@@ -32,7 +32,8 @@ export function Keys({ singleKeys: given = true }: { singleKeys?: boolean }) {
 
     const listen = (event: KeyboardEvent) => {
       if (event.defaultPrevented || event.isComposing) return;
-      if ((event.ctrlKey || event.metaKey) && event.key.toLowerCase() === 'k') return void focusNumberField(event);
+      if ((event.ctrlKey || event.metaKey) && event.key.toLowerCase() === 'k')
+        return void focusNumberField(event);
       if (event.ctrlKey || event.metaKey || event.altKey || isTaken(event.target)) return;
       if (event.key === 'Enter' && buffer.end()) return event.preventDefault();
       if (event.key === 'Escape') return void press('escape');
@@ -63,7 +64,9 @@ function useSwitchedHere(): boolean | null {
 function isTaken(target: EventTarget | null): boolean {
   if (!(target instanceof HTMLElement)) return false;
   if (document.querySelector('dialog[open]')) return true;
-  return target.isContentEditable || target.matches('input:not([type=checkbox], [type=radio]), textarea, select');
+  return (
+    target.isContentEditable || target.matches('input:not([type=checkbox], [type=radio]), textarea, select')
+  );
 }
 
 function startSequence() {
@@ -84,7 +87,9 @@ function startSequence() {
 }
 
 function press(key: string): boolean {
-  const target = [...document.querySelectorAll<HTMLElement>(`[data-key="${CSS.escape(key)}"]`)].find(canBeSeen);
+  const target = [...document.querySelectorAll<HTMLElement>(`[data-key="${CSS.escape(key)}"]`)].find(
+    canBeSeen,
+  );
   if (!target) return false;
   if (target.matches('input, textarea, select')) target.focus();
   else target.click();

@@ -52,7 +52,13 @@ interface MarkProps {
 /** Drawn on 14 units, in the ink of what stands around it. */
 export function StageMark({ stage, size = 13, className = '' }: MarkProps & { stage: Stage }) {
   return (
-    <svg width={inRem(size)} height={inRem(size)} viewBox="0 0 14 14" aria-hidden="true" className={`flex-none ${className}`}>
+    <svg
+      width={inRem(size)}
+      height={inRem(size)}
+      viewBox="0 0 14 14"
+      aria-hidden="true"
+      className={`flex-none ${className}`}
+    >
       {STAGE_SHAPES[stage]}
     </svg>
   );
@@ -88,13 +94,27 @@ const VERDICT_SHAPES: Record<Verdict, ReactNode> = {
     </>
   ),
   to_decide: (
-    <circle cx="8" cy="8" r="6.4" fill="none" stroke="currentColor" strokeWidth="1.5" strokeDasharray="2 2.4" />
+    <circle
+      cx="8"
+      cy="8"
+      r="6.4"
+      fill="none"
+      stroke="currentColor"
+      strokeWidth="1.5"
+      strokeDasharray="2 2.4"
+    />
   ),
 };
 
 export function VerdictMark({ verdict, size = 15, className = '' }: MarkProps & { verdict: Verdict }) {
   return (
-    <svg width={inRem(size)} height={inRem(size)} viewBox="0 0 16 16" aria-hidden="true" className={`flex-none ${className}`}>
+    <svg
+      width={inRem(size)}
+      height={inRem(size)}
+      viewBox="0 0 16 16"
+      aria-hidden="true"
+      className={`flex-none ${className}`}
+    >
       {VERDICT_SHAPES[verdict]}
     </svg>
   );

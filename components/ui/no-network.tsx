@@ -20,7 +20,8 @@ export function NoNetwork({ seen, kept }: NoNetworkProps) {
     <div role="status">
       {!online && (
         <Edge level="warn">
-          <strong>No network.</strong> {seen && <>You see {seen}.</>} {kept ?? 'Nothing is lost; nothing is sent until it is back.'}
+          <strong>No network.</strong> {seen && <>You see {seen}.</>}{' '}
+          {kept ?? 'Nothing is lost; nothing is sent until it is back.'}
         </Edge>
       )}
     </div>

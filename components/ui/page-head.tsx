@@ -24,7 +24,9 @@ export function PageHead({ tag, title, sub, cells, actions }: PageHeadProps) {
         </div>
       )}
       {cells}
-      {actions && <div className="ml-auto flex flex-wrap items-center gap-2.5 max-md:ml-0 max-md:w-full">{actions}</div>}
+      {actions && (
+        <div className="ml-auto flex flex-wrap items-center gap-2.5 max-md:ml-0 max-md:w-full">{actions}</div>
+      )}
     </div>
   );
 }

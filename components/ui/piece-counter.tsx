@@ -3,14 +3,25 @@
 import { type ComponentProps, useId, useRef } from 'react';
 import { Field, type FieldWords, fieldAttributes } from './field';
 
-export interface PieceCounterProps extends FieldWords, Omit<ComponentProps<'input'>, 'className' | 'id' | 'ref'> {
+export interface PieceCounterProps
+  extends FieldWords, Omit<ComponentProps<'input'>, 'className' | 'id' | 'ref'> {
   min?: number;
   max?: number;
   ref?: ComponentProps<'input'>['ref'];
 }
 
 /** Minus, number, plus: for gloves and a wet screen. Works with `{...register('good')}` and with a plain form. */
-export function PieceCounter({ label, hint, error, frozen, className, min = 0, max, ref, ...input }: PieceCounterProps) {
+export function PieceCounter({
+  label,
+  hint,
+  error,
+  frozen,
+  className,
+  min = 0,
+  max,
+  ref,
+  ...input
+}: PieceCounterProps) {
   const id = useId();
   const own = useRef<HTMLInputElement | null>(null);
   const words = { label, hint, error, frozen };
@@ -20,12 +31,19 @@ export function PieceCounter({ label, hint, error, frozen, className, min = 0, m
     if (typeof ref === 'function') ref(element);
     else if (ref) ref.current = element;
   };
-  const step = (by: number) => own.current && setAsIfTyped(own.current, within(own.current.value, by, { min, max }));
+  const step = (by: number) =>
+    own.current && setAsIfTyped(own.current, within(own.current.value, by, { min, max }));
 
   return (
     <Field id={id} {...words} {...(className ? { className } : {})}>
       <span className={`flex h-12 border-heavy bg-field ${error ? 'border-held-ink' : 'border-ink'}`}>
-        <StepButton says="One less" about={`${id}-label`} sign="−" onClick={() => step(-1)} disabled={Boolean(frozen)} />
+        <StepButton
+          says="One less"
+          about={`${id}-label`}
+          sign="−"
+          onClick={() => step(-1)}
+          disabled={Boolean(frozen)}
+        />
         <input
           inputMode="numeric"
           autoComplete="off"
@@ -36,7 +54,13 @@ export function PieceCounter({ label, hint, error, frozen, className, min = 0, m
           onFocus={(event) => event.currentTarget.select()}
           className="w-full min-w-14 flex-1 border-x-heavy border-ink bg-transparent text-center font-mono text-[1.1875rem] font-semibold"
         />
-        <StepButton says="One more" about={`${id}-label`} sign="+" onClick={() => step(1)} disabled={Boolean(frozen)} />
+        <StepButton
+          says="One more"
+          about={`${id}-label`}
+          sign="+"
+          onClick={() => step(1)}
+          disabled={Boolean(frozen)}
+        />
       </span>
     </Field>
   );

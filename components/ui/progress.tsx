@@ -33,7 +33,11 @@ export function Progress({ says, value, of, where }: ProgressProps) {
         <rect x="1" y="2" width={part * (WIDTH - 2)} height="7" fill="var(--ink)" />
         <path d={`M1 9H${WIDTH - 1}`} stroke="var(--line)" />
         {Array.from({ length: TICKS + 1 }, (_, tick) => (
-          <path key={tick} d={`M${1 + (tick / TICKS) * (WIDTH - 2)} 9v${tick % 5 === 0 ? 5 : 3}`} stroke="var(--line)" />
+          <path
+            key={tick}
+            d={`M${1 + (tick / TICKS) * (WIDTH - 2)} 9v${tick % 5 === 0 ? 5 : 3}`}
+            stroke="var(--line)"
+          />
         ))}
       </svg>
       <span className="text-quiet">{where}</span>

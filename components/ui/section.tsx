@@ -27,8 +27,18 @@ export function Section({ title, note, action, children, className = '', id }: S
 }
 
 /** Main and side, as on every page that has both; under 1100 px the side goes below. */
-export function MainAndSide({ main, side, wide = false }: { main: ReactNode; side: ReactNode; wide?: boolean }) {
-  const columns = wide ? 'xl:grid-cols-[minmax(0,1016fr)_minmax(0,340fr)]' : 'xl:grid-cols-[minmax(0,944fr)_minmax(0,412fr)]';
+export function MainAndSide({
+  main,
+  side,
+  wide = false,
+}: {
+  main: ReactNode;
+  side: ReactNode;
+  wide?: boolean;
+}) {
+  const columns = wide
+    ? 'xl:grid-cols-[minmax(0,1016fr)_minmax(0,340fr)]'
+    : 'xl:grid-cols-[minmax(0,944fr)_minmax(0,412fr)]';
   return (
     <div className={`grid grid-cols-1 gap-9 ${columns}`}>
       <div className="flex min-w-0 flex-col gap-6">{main}</div>

@@ -41,7 +41,12 @@ interface SegmentButtonsProps<Value extends string> {
 }
 
 /** The same, steered by what is on the screen. */
-export function SegmentButtons<Value extends string>({ label, value, options, onChange }: SegmentButtonsProps<Value>) {
+export function SegmentButtons<Value extends string>({
+  label,
+  value,
+  options,
+  onChange,
+}: SegmentButtonsProps<Value>) {
   return (
     <div role="group" aria-label={label} className={BOX}>
       {options.map((option) => (

@@ -6,7 +6,7 @@ import { STAGE_TONES, STAGE_WORDS } from './stages';
 export function StageWord({ stage, says }: { stage: Stage; says?: string }) {
   return (
     <span
-      className={`inline-flex items-center gap-1.5 whitespace-nowrap font-cond text-word text-(--ti) ${STAGE_TONES[stage]}`}
+      className={`inline-flex items-center gap-1.5 font-cond text-word whitespace-nowrap text-(--ti) ${STAGE_TONES[stage]}`}
     >
       <StageMark stage={stage} />
       {says ?? STAGE_WORDS[stage]}

@@ -30,7 +30,12 @@ interface SteelRuleProps {
   small?: boolean;
 }
 
-const COLOURS = { ink: 'var(--ink)', proved: 'var(--proved)', held: 'var(--held-ink)', stocked: 'var(--stocked-ink)' };
+const COLOURS = {
+  ink: 'var(--ink)',
+  proved: 'var(--proved)',
+  held: 'var(--held-ink)',
+  stocked: 'var(--stocked-ink)',
+};
 
 /** A quantity with a limit, drawn so that the number can be read off it. */
 export function SteelRule(props: SteelRuleProps) {
@@ -40,7 +45,8 @@ export function SteelRule(props: SteelRuleProps) {
   const top = words ? 16 : 0;
   const line = top + (small ? 9 : 20);
   const bar = small ? 6 : 9;
-  const place = (at: number) => round(1 + ((Math.min(Math.max(at, from), to) - from) / (to - from)) * (width - 2));
+  const place = (at: number) =>
+    round(1 + ((Math.min(Math.max(at, from), to) - from) / (to - from)) * (width - 2));
 
   return (
     <svg
@@ -52,7 +58,13 @@ export function SteelRule(props: SteelRuleProps) {
       className="h-auto max-w-full overflow-visible"
     >
       {band && (
-        <rect x={place(band.from)} y={top + 2} width={place(band.to) - place(band.from)} height={line - top - 2} fill="var(--proved-wash)" />
+        <rect
+          x={place(band.from)}
+          y={top + 2}
+          width={place(band.to) - place(band.from)}
+          height={line - top - 2}
+          fill="var(--proved-wash)"
+        />
       )}
       {value !== undefined && (
         <rect x="1" y={line - bar} width={place(value) - 1} height={bar} fill={COLOURS[tone]} />
@@ -70,7 +82,14 @@ export function SteelRule(props: SteelRuleProps) {
       <Ticks from={from} to={to} tick={tick} number={number} place={place} line={line} small={small} />
       <path d={`M1 ${line}H${width - 1}`} stroke="var(--line)" />
       {[...marks, ...(limit ? [limit] : [])].map((mark) => (
-        <Mark key={`${mark.at} ${mark.says ?? ''}`} mark={mark} x={place(mark.at)} top={top} line={line} width={width} />
+        <Mark
+          key={`${mark.at} ${mark.says ?? ''}`}
+          mark={mark}
+          x={place(mark.at)}
+          top={top}
+          line={line}
+          width={width}
+        />
       ))}
     </svg>
   );
@@ -124,7 +143,14 @@ function Mark({ mark: { tone = 'ink', says }, x, top, line, width }: MarkProps) 
     <g>
       <path d={`M${x} ${top}V${line + 3}`} stroke={colour} strokeWidth="2" />
       {says && (
-        <text x={left ? x + 1 : x - 1} y="11" textAnchor={left ? 'end' : 'start'} className="font-cond" fontSize="13.5" style={{ fill: colour }}>
+        <text
+          x={left ? x + 1 : x - 1}
+          y="11"
+          textAnchor={left ? 'end' : 'start'}
+          className="font-cond"
+          fontSize="13.5"
+          style={{ fill: colour }}
+        >
           {says}
         </text>
       )}

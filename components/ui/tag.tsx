@@ -41,9 +41,24 @@ export function BatchTag({ href, wide = false, ...tag }: BatchTagProps) {
   );
 }
 
-function Tag({ stage, number, text, size = 'list', show = 'all', wide, fading, ...heard }: Omit<BatchTagProps, 'href'>) {
+function Tag({
+  stage,
+  number,
+  text,
+  size = 'list',
+  show = 'all',
+  wide,
+  fading,
+  ...heard
+}: Omit<BatchTagProps, 'href'>) {
   const shown = { mark: 0, number: 1, word: 2, all: 3 }[show];
-  const classes = ['lw-tag', SIZES[size], STAGE_TONES[stage], wide ? 'w-full' : '', fading ? 'lw-tag-fading' : ''];
+  const classes = [
+    'lw-tag',
+    SIZES[size],
+    STAGE_TONES[stage],
+    wide ? 'w-full' : '',
+    fading ? 'lw-tag-fading' : '',
+  ];
   return (
     <span className={classes.filter(Boolean).join(' ')}>
       <StageMark stage={stage} size={MARKS[size]} className="lw-tag-mark" />

@@ -40,7 +40,9 @@ export function VerdictWord({ verdict, says, overruled }: VerdictProps) {
 
 function Word({ verdict, says }: Pick<VerdictProps, 'verdict' | 'says'>) {
   return (
-    <span className={`inline-flex items-center gap-1.5 whitespace-nowrap font-cond text-word ${TONES[verdict]}`}>
+    <span
+      className={`inline-flex items-center gap-1.5 font-cond text-word whitespace-nowrap ${TONES[verdict]}`}
+    >
       <VerdictMark verdict={verdict} />
       {says ?? WORDS[verdict]}
     </span>

@@ -30,6 +30,10 @@ export const auditEntries = pgTable(
     primaryKey({ columns: [t.shopId, t.seq] }),
     index('audit_entity').on(t.shopId, t.entity, t.entityId),
     pgPolicy('own_shop_reads', { for: 'select', to: appShop, using: sql`shop_id = (select current_shop())` }),
-    pgPolicy('own_shop_adds', { for: 'insert', to: appShop, withCheck: sql`shop_id = (select current_shop())` }),
+    pgPolicy('own_shop_adds', {
+      for: 'insert',
+      to: appShop,
+      withCheck: sql`shop_id = (select current_shop())`,
+    }),
   ],
 );

@@ -1,11 +1,35 @@
 import { sql } from 'drizzle-orm';
-import { bigint, check, date, foreignKey, index, integer, jsonb, pgEnum, pgPolicy, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
+import {
+  bigint,
+  check,
+  date,
+  foreignKey,
+  index,
+  integer,
+  jsonb,
+  pgEnum,
+  pgPolicy,
+  pgTable,
+  text,
+  unique,
+  uuid,
+} from 'drizzle-orm/pg-core';
 
 import type { FrozenLine } from '@/lib/batches/frozen-line';
 import { STAGES } from '@/lib/batches/stage';
 import { REQUIREMENT_SOURCES } from '@/lib/parts/to-prove';
 
-import { appDoor, appPortal, createdColumn, doorOnly, idColumn, moment, ownShopOnly, portalReadsBatch, shopColumn } from './columns';
+import {
+  appDoor,
+  appPortal,
+  createdColumn,
+  doorOnly,
+  idColumn,
+  moment,
+  ownShopOnly,
+  portalReadsBatch,
+  shopColumn,
+} from './columns';
 import { files } from './files';
 import { lots } from './lots';
 import { shopProcessors } from './organisations';
@@ -72,7 +96,10 @@ export const batches = pgTable(
     index('batches_stage').on(t.shopId, t.stage, t.id.desc()),
     index('batches_newest').on(t.shopId, t.id.desc()),
     index('batches_processor').on(t.processorId, t.id.desc()),
-    foreignKey({ columns: [t.shopId, t.processorId], foreignColumns: [shopProcessors.shopId, shopProcessors.processorId] }),
+    foreignKey({
+      columns: [t.shopId, t.processorId],
+      foreignColumns: [shopProcessors.shopId, shopProcessors.processorId],
+    }),
     ownShopOnly(),
     pgPolicy('portal_reads_dispatched', {
       for: 'select',

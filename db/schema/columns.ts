@@ -36,7 +36,17 @@ export const ownShopOnly = () =>
  * goes through `inShopOf` (db/client.ts), after its own eyes have seen the batch.
  */
 export const portalReadsBatch = () =>
-  pgPolicy('portal_reads_batch', { for: 'select', to: appPortal, using: sql`batch_id in (select id from batches)` });
+  pgPolicy('portal_reads_batch', {
+    for: 'select',
+    to: appPortal,
+    using: sql`batch_id in (select id from batches)`,
+  });
 
 /** Open while finding out who somebody is, and only then; column grants narrow what is to be seen. */
-export const doorOnly = () => pgPolicy('door', { for: 'all', to: appDoor, using: sql`(select at_the_door())`, withCheck: sql`(select at_the_door())` });
+export const doorOnly = () =>
+  pgPolicy('door', {
+    for: 'all',
+    to: appDoor,
+    using: sql`(select at_the_door())`,
+    withCheck: sql`(select at_the_door())`,
+  });

@@ -1,17 +1,43 @@
 import { sql } from 'drizzle-orm';
-import { check, date, foreignKey, index, integer, pgEnum, pgPolicy, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
+import {
+  check,
+  date,
+  foreignKey,
+  index,
+  integer,
+  pgEnum,
+  pgPolicy,
+  pgTable,
+  text,
+  unique,
+  uuid,
+} from 'drizzle-orm/pg-core';
 
 import { VERDICTS } from '@/lib/certificates/verdict';
 import { DISPOSITIONS } from '@/lib/nonconformances/disposition';
 
 import { batches, batchLines, requirements } from './batches';
-import { appDoor, createdColumn, idColumn, moment, ownShopOnly, portalReadsBatch, shopColumn } from './columns';
+import {
+  appDoor,
+  createdColumn,
+  idColumn,
+  moment,
+  ownShopOnly,
+  portalReadsBatch,
+  shopColumn,
+} from './columns';
 import { files } from './files';
 import { lots } from './lots';
 
 export const verdict = pgEnum('verdict', VERDICTS);
 export const disposition = pgEnum('disposition', DISPOSITIONS);
-export const nonconformanceKind = pgEnum('nonconformance_kind', ['damaged', 'short', 'over', 'requirement', 'papers']);
+export const nonconformanceKind = pgEnum('nonconformance_kind', [
+  'damaged',
+  'short',
+  'over',
+  'requirement',
+  'papers',
+]);
 
 export const receipts = pgTable(
   'receipts',
@@ -48,7 +74,10 @@ export const receiptLines = pgTable(
   },
   (t) => [
     unique('receipt_lines_once').on(t.receiptId, t.lineId),
-    check('counts_not_negative', sql`${t.good} >= 0 and ${t.damaged} >= 0 and ${t.short} >= 0 and ${t.over} >= 0`),
+    check(
+      'counts_not_negative',
+      sql`${t.good} >= 0 and ${t.damaged} >= 0 and ${t.short} >= 0 and ${t.over} >= 0`,
+    ),
     index('receipt_lines_line').on(t.lineId),
     foreignKey({ columns: [t.shopId, t.receiptId], foreignColumns: [receipts.shopId, receipts.id] }),
     foreignKey({ columns: [t.shopId, t.lineId], foreignColumns: [batchLines.shopId, batchLines.id] }),
@@ -58,7 +87,13 @@ export const receiptLines = pgTable(
 
 export const receiptPhotos = pgTable(
   'receipt_photos',
-  { id: idColumn(), shopId: shopColumn(), receiptId: uuid('receipt_id').notNull(), lineId: uuid('line_id'), fileId: uuid('file_id').notNull() },
+  {
+    id: idColumn(),
+    shopId: shopColumn(),
+    receiptId: uuid('receipt_id').notNull(),
+    lineId: uuid('line_id'),
+    fileId: uuid('file_id').notNull(),
+  },
   (t) => [
     index('receipt_photos_receipt').on(t.receiptId),
     foreignKey({ columns: [t.shopId, t.receiptId], foreignColumns: [receipts.shopId, receipts.id] }),
@@ -136,8 +171,14 @@ export const decisions = pgTable(
   },
   (t) => [
     unique('decisions_once').on(t.certificateId, t.requirementId),
-    foreignKey({ columns: [t.shopId, t.certificateId], foreignColumns: [certificates.shopId, certificates.id] }),
-    foreignKey({ columns: [t.shopId, t.requirementId], foreignColumns: [requirements.shopId, requirements.id] }),
+    foreignKey({
+      columns: [t.shopId, t.certificateId],
+      foreignColumns: [certificates.shopId, certificates.id],
+    }),
+    foreignKey({
+      columns: [t.shopId, t.requirementId],
+      foreignColumns: [requirements.shopId, requirements.id],
+    }),
     ownShopOnly(),
   ],
 );
@@ -162,7 +203,10 @@ export const signatures = pgTable(
   (t) => [
     unique('signatures_shop').on(t.shopId, t.id),
     index('signatures_batch').on(t.batchId),
-    foreignKey({ columns: [t.shopId, t.certificateId], foreignColumns: [certificates.shopId, certificates.id] }),
+    foreignKey({
+      columns: [t.shopId, t.certificateId],
+      foreignColumns: [certificates.shopId, certificates.id],
+    }),
     foreignKey({ columns: [t.shopId, t.batchId], foreignColumns: [batches.shopId, batches.id] }),
     ownShopOnly(),
   ],
@@ -183,7 +227,10 @@ export const coverage = pgTable(
     check('pieces_positive', sql`${t.pieces} > 0`),
     index('coverage_line').on(t.lineId),
     foreignKey({ columns: [t.shopId, t.signatureId], foreignColumns: [signatures.shopId, signatures.id] }),
-    foreignKey({ columns: [t.shopId, t.certificateId], foreignColumns: [certificates.shopId, certificates.id] }),
+    foreignKey({
+      columns: [t.shopId, t.certificateId],
+      foreignColumns: [certificates.shopId, certificates.id],
+    }),
     foreignKey({ columns: [t.shopId, t.lineId], foreignColumns: [batchLines.shopId, batchLines.id] }),
     ownShopOnly(),
   ],
@@ -219,8 +266,14 @@ export const nonconformances = pgTable(
     foreignKey({ columns: [t.shopId, t.batchId], foreignColumns: [batches.shopId, batches.id] }),
     foreignKey({ columns: [t.shopId, t.lineId], foreignColumns: [batchLines.shopId, batchLines.id] }),
     foreignKey({ columns: [t.shopId, t.lotId], foreignColumns: [lots.shopId, lots.id] }),
-    foreignKey({ columns: [t.shopId, t.requirementId], foreignColumns: [requirements.shopId, requirements.id] }),
-    foreignKey({ columns: [t.shopId, t.certificateId], foreignColumns: [certificates.shopId, certificates.id] }),
+    foreignKey({
+      columns: [t.shopId, t.requirementId],
+      foreignColumns: [requirements.shopId, requirements.id],
+    }),
+    foreignKey({
+      columns: [t.shopId, t.certificateId],
+      foreignColumns: [certificates.shopId, certificates.id],
+    }),
     ownShopOnly(),
   ],
 );
@@ -243,7 +296,10 @@ export const dispositions = pgTable(
   (t) => [
     check('pieces_positive', sql`${t.pieces} > 0`),
     index('dispositions_nonconformance').on(t.nonconformanceId),
-    foreignKey({ columns: [t.shopId, t.nonconformanceId], foreignColumns: [nonconformances.shopId, nonconformances.id] }),
+    foreignKey({
+      columns: [t.shopId, t.nonconformanceId],
+      foreignColumns: [nonconformances.shopId, nonconformances.id],
+    }),
     foreignKey({ columns: [t.shopId, t.fileId], foreignColumns: [files.shopId, files.id] }),
     ownShopOnly(),
   ],

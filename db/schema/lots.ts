@@ -1,5 +1,17 @@
 import { sql } from 'drizzle-orm';
-import { boolean, check, foreignKey, index, integer, pgEnum, pgTable, primaryKey, text, unique, uuid } from 'drizzle-orm/pg-core';
+import {
+  boolean,
+  check,
+  foreignKey,
+  index,
+  integer,
+  pgEnum,
+  pgTable,
+  primaryKey,
+  text,
+  unique,
+  uuid,
+} from 'drizzle-orm/pg-core';
 
 import { PLACES } from '@/lib/stock/places';
 
@@ -80,7 +92,10 @@ export const movements = pgTable(
   (t) => [
     check('pieces_positive', sql`${t.pieces} > 0`),
     check('from_is_whole', sql`(${t.fromPlace} is null) = (${t.fromHolderId} is null)`),
-    check('goes_somewhere', sql`${t.fromPlace} is null or (${t.fromPlace}, ${t.fromHolderId}) <> (${t.toPlace}, ${t.toHolderId})`),
+    check(
+      'goes_somewhere',
+      sql`${t.fromPlace} is null or (${t.fromPlace}, ${t.fromHolderId}) <> (${t.toPlace}, ${t.toHolderId})`,
+    ),
     check('names_are_counted', sql`${t.pieceIds} is null or cardinality(${t.pieceIds}) = ${t.pieces}`),
     index('movements_lot').on(t.shopId, t.lotId, t.movedAt),
     index('movements_line').on(t.batchLineId),
@@ -102,7 +117,9 @@ export const balances = pgTable(
   (t) => [
     primaryKey({ columns: [t.lotId, t.place, t.holderId] }),
     check('never_negative', sql`${t.pieces} >= 0`),
-    index('balances_place').on(t.shopId, t.place, t.holderId).where(sql`pieces > 0`),
+    index('balances_place')
+      .on(t.shopId, t.place, t.holderId)
+      .where(sql`pieces > 0`),
     foreignKey({ columns: [t.shopId, t.lotId], foreignColumns: [lots.shopId, lots.id] }),
     ownShopOnly(),
   ],
@@ -111,6 +128,16 @@ export const balances = pgTable(
 /** A shelf, bin or rack in the shop's stores. */
 export const locations = pgTable(
   'locations',
-  { id: idColumn(), shopId: shopColumn().references(() => shops.id), name: text('name').notNull(), closedAt: moment('closed_at'), createdAt: createdColumn() },
-  (t) => [unique('locations_shop').on(t.shopId, t.id), unique('locations_name').on(t.shopId, t.name), ownShopOnly()],
+  {
+    id: idColumn(),
+    shopId: shopColumn().references(() => shops.id),
+    name: text('name').notNull(),
+    closedAt: moment('closed_at'),
+    createdAt: createdColumn(),
+  },
+  (t) => [
+    unique('locations_shop').on(t.shopId, t.id),
+    unique('locations_name').on(t.shopId, t.name),
+    ownShopOnly(),
+  ],
 );

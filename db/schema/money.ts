@@ -1,13 +1,48 @@
 import { sql } from 'drizzle-orm';
-import { bigint, check, date, foreignKey, index, integer, jsonb, pgEnum, pgTable, text, unique, uniqueIndex, uuid } from 'drizzle-orm/pg-core';
+import {
+  bigint,
+  check,
+  date,
+  foreignKey,
+  index,
+  integer,
+  jsonb,
+  pgEnum,
+  pgTable,
+  text,
+  unique,
+  uniqueIndex,
+  uuid,
+} from 'drizzle-orm/pg-core';
 
 import { batches, batchLines } from './batches';
-import { createdColumn, doorOnly, idColumn, moment, ownShopOnly, portalReadsBatch, shopColumn } from './columns';
+import {
+  createdColumn,
+  doorOnly,
+  idColumn,
+  moment,
+  ownShopOnly,
+  portalReadsBatch,
+  shopColumn,
+} from './columns';
 import { files } from './files';
 
-export const invoiceLineKind = pgEnum('invoice_line_kind', ['pieces', 'lot_minimum', 'certification', 'freight', 'tax', 'other']);
+export const invoiceLineKind = pgEnum('invoice_line_kind', [
+  'pieces',
+  'lot_minimum',
+  'certification',
+  'freight',
+  'tax',
+  'other',
+]);
 export const paymentState = pgEnum('payment_state', ['pending', 'succeeded', 'failed', 'refunded']);
-export const moneyEntryKind = pgEnum('money_entry_kind', ['invoiced', 'withheld', 'credited', 'paid', 'refunded']);
+export const moneyEntryKind = pgEnum('money_entry_kind', [
+  'invoiced',
+  'withheld',
+  'credited',
+  'paid',
+  'refunded',
+]);
 
 /** A processor's invoice as the office reads it, against one order. */
 export const invoices = pgTable(
@@ -40,7 +75,9 @@ export const invoices = pgTable(
   (t) => [
     unique('invoices_shop').on(t.shopId, t.id),
     // The same invoice twice is refused by the database; a refused one frees its number for a corrected copy.
-    uniqueIndex('invoices_number_once').on(t.shopId, t.processorId, t.numberKey).where(sql`refused_at is null`),
+    uniqueIndex('invoices_number_once')
+      .on(t.shopId, t.processorId, t.numberKey)
+      .where(sql`refused_at is null`),
     index('invoices_number_search').on(t.shopId, t.number.op('text_pattern_ops')),
     index('invoices_newest').on(t.shopId, t.id.desc()),
     index('invoices_batch').on(t.batchId),

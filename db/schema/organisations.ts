@@ -1,7 +1,30 @@
 import { sql } from 'drizzle-orm';
-import { bigint, boolean, date, foreignKey, index, integer, pgEnum, pgPolicy, pgTable, primaryKey, text, unique, uuid } from 'drizzle-orm/pg-core';
+import {
+  bigint,
+  boolean,
+  date,
+  foreignKey,
+  index,
+  integer,
+  pgEnum,
+  pgPolicy,
+  pgTable,
+  primaryKey,
+  text,
+  unique,
+  uuid,
+} from 'drizzle-orm/pg-core';
 
-import { appDoor, appPortal, appShop, createdColumn, idColumn, moment, ownShopOnly, shopColumn } from './columns';
+import {
+  appDoor,
+  appPortal,
+  appShop,
+  createdColumn,
+  idColumn,
+  moment,
+  ownShopOnly,
+  shopColumn,
+} from './columns';
 
 export const separation = pgEnum('separation', ['refuse', 'record']);
 export const latenessBasis = pgEnum('lateness_basis', ['first_promise', 'latest_promise']);
@@ -28,8 +51,17 @@ export const shops = pgTable(
     createdAt: createdColumn(),
   },
   () => [
-    pgPolicy('own_shop_only', { for: 'all', to: appShop, using: sql`id = (select current_shop())`, withCheck: sql`id = (select current_shop())` }),
-    pgPolicy('portal_reads_customers', { for: 'select', to: appPortal, using: sql`id in (select shop_id from batches)` }),
+    pgPolicy('own_shop_only', {
+      for: 'all',
+      to: appShop,
+      using: sql`id = (select current_shop())`,
+      withCheck: sql`id = (select current_shop())`,
+    }),
+    pgPolicy('portal_reads_customers', {
+      for: 'select',
+      to: appPortal,
+      using: sql`id in (select shop_id from batches)`,
+    }),
     pgPolicy('door', { for: 'select', to: appDoor, using: sql`(select at_the_door())` }),
   ],
 );
@@ -50,10 +82,27 @@ export const processors = pgTable(
   },
   (t) => [
     unique('processors_email').on(t.email),
-    pgPolicy('shop_reads_its_processors', { for: 'select', to: appShop, using: sql`id in (select processor_id from shop_processors)` }),
-    pgPolicy('portal_reads_itself', { for: 'select', to: appPortal, using: sql`id = (select current_processor())` }),
-    pgPolicy('portal_changes_itself', { for: 'update', to: appPortal, using: sql`id = (select current_processor()) and (select current_batch()) is null` }),
-    pgPolicy('door', { for: 'all', to: appDoor, using: sql`(select at_the_door())`, withCheck: sql`(select at_the_door())` }),
+    pgPolicy('shop_reads_its_processors', {
+      for: 'select',
+      to: appShop,
+      using: sql`id in (select processor_id from shop_processors)`,
+    }),
+    pgPolicy('portal_reads_itself', {
+      for: 'select',
+      to: appPortal,
+      using: sql`id = (select current_processor())`,
+    }),
+    pgPolicy('portal_changes_itself', {
+      for: 'update',
+      to: appPortal,
+      using: sql`id = (select current_processor()) and (select current_batch()) is null`,
+    }),
+    pgPolicy('door', {
+      for: 'all',
+      to: appDoor,
+      using: sql`(select at_the_door())`,
+      withCheck: sql`(select at_the_door())`,
+    }),
   ],
 );
 
@@ -61,7 +110,9 @@ export const shopProcessors = pgTable(
   'shop_processors',
   {
     shopId: shopColumn().references(() => shops.id),
-    processorId: uuid('processor_id').notNull().references(() => processors.id),
+    processorId: uuid('processor_id')
+      .notNull()
+      .references(() => processors.id),
     contactName: text('contact_name'),
     contactEmail: text('contact_email').notNull(),
     note: text('note'),
@@ -72,8 +123,17 @@ export const shopProcessors = pgTable(
   (t) => [
     primaryKey({ columns: [t.shopId, t.processorId] }),
     ownShopOnly(),
-    pgPolicy('portal_reads_own', { for: 'select', to: appPortal, using: sql`processor_id = (select current_processor())` }),
-    pgPolicy('door', { for: 'all', to: appDoor, using: sql`(select at_the_door())`, withCheck: sql`(select at_the_door())` }),
+    pgPolicy('portal_reads_own', {
+      for: 'select',
+      to: appPortal,
+      using: sql`processor_id = (select current_processor())`,
+    }),
+    pgPolicy('door', {
+      for: 'all',
+      to: appDoor,
+      using: sql`(select at_the_door())`,
+      withCheck: sql`(select at_the_door())`,
+    }),
   ],
 );
 
@@ -93,7 +153,10 @@ export const approvals = pgTable(
     createdAt: createdColumn(),
   },
   (t) => [
-    foreignKey({ columns: [t.shopId, t.processorId], foreignColumns: [shopProcessors.shopId, shopProcessors.processorId] }),
+    foreignKey({
+      columns: [t.shopId, t.processorId],
+      foreignColumns: [shopProcessors.shopId, shopProcessors.processorId],
+    }),
     index('approvals_processor').on(t.shopId, t.processorId),
     ownShopOnly(),
   ],
@@ -102,6 +165,10 @@ export const approvals = pgTable(
 /** Next number of each kind in a shop. A number is taken by an update, so none is given twice. */
 export const counters = pgTable(
   'counters',
-  { shopId: shopColumn().references(() => shops.id), kind: text('kind').notNull(), next: integer('next').notNull().default(1) },
+  {
+    shopId: shopColumn().references(() => shops.id),
+    kind: text('kind').notNull(),
+    next: integer('next').notNull().default(1),
+  },
   (t) => [primaryKey({ columns: [t.shopId, t.kind] }), ownShopOnly()],
 );

@@ -1,5 +1,18 @@
 import { sql } from 'drizzle-orm';
-import { boolean, check, date, foreignKey, index, integer, jsonb, pgEnum, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
+import {
+  boolean,
+  check,
+  date,
+  foreignKey,
+  index,
+  integer,
+  jsonb,
+  pgEnum,
+  pgTable,
+  text,
+  unique,
+  uuid,
+} from 'drizzle-orm/pg-core';
 
 import { PROCESSES, PRODUCT_FORMS } from '@/lib/trade/process';
 import type { ToProve } from '@/lib/parts/to-prove';
@@ -91,7 +104,11 @@ export const assemblies = pgTable(
     version: integer('version').notNull().default(1),
     createdAt: createdColumn(),
   },
-  (t) => [unique('assemblies_shop').on(t.shopId, t.id), unique('assemblies_name').on(t.shopId, t.name), ownShopOnly()],
+  (t) => [
+    unique('assemblies_shop').on(t.shopId, t.id),
+    unique('assemblies_name').on(t.shopId, t.name),
+    ownShopOnly(),
+  ],
 );
 
 export const assemblyNeeds = pgTable(

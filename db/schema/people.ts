@@ -1,5 +1,18 @@
 import { sql } from 'drizzle-orm';
-import { bigint, boolean, check, index, integer, jsonb, pgEnum, pgPolicy, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
+import {
+  bigint,
+  boolean,
+  check,
+  index,
+  integer,
+  jsonb,
+  pgEnum,
+  pgPolicy,
+  pgTable,
+  text,
+  unique,
+  uuid,
+} from 'drizzle-orm/pg-core';
 
 import { appPortal, appShop, createdColumn, doorOnly, idColumn, moment } from './columns';
 import { processors, shops } from './organisations';
@@ -24,10 +37,26 @@ export const users = pgTable(
   (t) => [
     unique('users_email').on(t.email),
     check('email_is_lower_case', sql`${t.email} = lower(${t.email})`),
-    pgPolicy('shop_reads_its_people', { for: 'select', to: appShop, using: sql`id in (select user_id from memberships)` }),
-    pgPolicy('shop_person_changes_self', { for: 'update', to: appShop, using: sql`id = (select current_person())` }),
-    pgPolicy('portal_reads_its_people', { for: 'select', to: appPortal, using: sql`id in (select user_id from memberships)` }),
-    pgPolicy('portal_person_changes_self', { for: 'update', to: appPortal, using: sql`id = (select current_person())` }),
+    pgPolicy('shop_reads_its_people', {
+      for: 'select',
+      to: appShop,
+      using: sql`id in (select user_id from memberships)`,
+    }),
+    pgPolicy('shop_person_changes_self', {
+      for: 'update',
+      to: appShop,
+      using: sql`id = (select current_person())`,
+    }),
+    pgPolicy('portal_reads_its_people', {
+      for: 'select',
+      to: appPortal,
+      using: sql`id in (select user_id from memberships)`,
+    }),
+    pgPolicy('portal_person_changes_self', {
+      for: 'update',
+      to: appPortal,
+      using: sql`id = (select current_person())`,
+    }),
     doorOnly(),
   ],
 );
@@ -37,7 +66,9 @@ export const memberships = pgTable(
   'memberships',
   {
     id: idColumn(),
-    userId: uuid('user_id').notNull().references(() => users.id),
+    userId: uuid('user_id')
+      .notNull()
+      .references(() => users.id),
     shopId: uuid('shop_id').references(() => shops.id),
     processorId: uuid('processor_id').references(() => processors.id),
     roles: text('roles').array().notNull(),
@@ -50,8 +81,17 @@ export const memberships = pgTable(
     unique('one_membership_per_shop').on(t.userId, t.shopId),
     unique('one_membership_per_processor').on(t.userId, t.processorId),
     index('memberships_shop').on(t.shopId),
-    pgPolicy('own_shop_only', { for: 'all', to: appShop, using: sql`shop_id = (select current_shop())`, withCheck: sql`shop_id = (select current_shop())` }),
-    pgPolicy('own_processor_only', { for: 'select', to: appPortal, using: sql`processor_id = (select current_processor()) and (select current_batch()) is null` }),
+    pgPolicy('own_shop_only', {
+      for: 'all',
+      to: appShop,
+      using: sql`shop_id = (select current_shop())`,
+      withCheck: sql`shop_id = (select current_shop())`,
+    }),
+    pgPolicy('own_processor_only', {
+      for: 'select',
+      to: appPortal,
+      using: sql`processor_id = (select current_processor()) and (select current_batch()) is null`,
+    }),
     doorOnly(),
   ],
 );
@@ -75,7 +115,12 @@ export const invitations = pgTable(
   (t) => [
     unique('invitations_token').on(t.tokenHash),
     check('one_organisation', sql`(${t.shopId} is null) <> (${t.processorId} is null)`),
-    pgPolicy('own_shop_only', { for: 'all', to: appShop, using: sql`shop_id = (select current_shop())`, withCheck: sql`shop_id = (select current_shop())` }),
+    pgPolicy('own_shop_only', {
+      for: 'all',
+      to: appShop,
+      using: sql`shop_id = (select current_shop())`,
+      withCheck: sql`shop_id = (select current_shop())`,
+    }),
     doorOnly(),
   ],
 );
@@ -85,7 +130,9 @@ export const mailedLinks = pgTable(
   'mailed_links',
   {
     id: idColumn(),
-    userId: uuid('user_id').notNull().references(() => users.id),
+    userId: uuid('user_id')
+      .notNull()
+      .references(() => users.id),
     purpose: linkPurpose('purpose').notNull(),
     tokenHash: text('token_hash').notNull(),
     expiresAt: moment('expires_at').notNull(),
@@ -100,8 +147,12 @@ export const apiTokens = pgTable(
   'api_tokens',
   {
     id: idColumn(),
-    shopId: uuid('shop_id').notNull().references(() => shops.id),
-    userId: uuid('user_id').notNull().references(() => users.id),
+    shopId: uuid('shop_id')
+      .notNull()
+      .references(() => shops.id),
+    userId: uuid('user_id')
+      .notNull()
+      .references(() => users.id),
     name: text('name').notNull(),
     tokenHash: text('token_hash').notNull(),
     /** First characters, shown so that a person recognises it. */
@@ -140,8 +191,18 @@ export const idempotencyKeys = pgTable(
   },
   (t) => [
     unique('idempotency_keys_once').on(t.owner, t.key),
-    pgPolicy('own_keys_only', { for: 'all', to: appShop, using: sql`owner = (select current_key_owner())`, withCheck: sql`owner = (select current_key_owner())` }),
-    pgPolicy('own_keys_only_portal', { for: 'all', to: appPortal, using: sql`owner = (select current_key_owner())`, withCheck: sql`owner = (select current_key_owner())` }),
+    pgPolicy('own_keys_only', {
+      for: 'all',
+      to: appShop,
+      using: sql`owner = (select current_key_owner())`,
+      withCheck: sql`owner = (select current_key_owner())`,
+    }),
+    pgPolicy('own_keys_only_portal', {
+      for: 'all',
+      to: appPortal,
+      using: sql`owner = (select current_key_owner())`,
+      withCheck: sql`owner = (select current_key_owner())`,
+    }),
     doorOnly(),
   ],
 );
@@ -152,6 +213,10 @@ export const idempotencyKeys = pgTable(
  */
 export const throttles = pgTable(
   'throttles',
-  { key: text('key').primaryKey(), points: integer('points').notNull().default(0), expire: bigint('expire', { mode: 'number' }) },
+  {
+    key: text('key').primaryKey(),
+    points: integer('points').notNull().default(0),
+    expire: bigint('expire', { mode: 'number' }),
+  },
   () => [doorOnly()],
 );

@@ -29,31 +29,81 @@ export interface DemoProcessor {
 export interface DemoOrganisations {
   shopId: string;
   otherShopId: string;
-  people: Record<'lead' | 'lead2' | 'inspector' | 'inspector2' | 'office' | 'admin' | 'auditor' | 'foreman', DemoPerson>;
+  people: Record<
+    'lead' | 'lead2' | 'inspector' | 'inspector2' | 'office' | 'admin' | 'auditor' | 'foreman',
+    DemoPerson
+  >;
   otherOwner: DemoPerson;
   processors: Record<'thermal' | 'plating' | 'inspection' | 'peening', DemoProcessor>;
 }
 
-const HEAT: readonly Process[] = ['solution_heat_treat_and_age', 'solution_heat_treat', 'artificial_age', 'anneal', 'harden_and_temper', 'stress_relief', 'embrittlement_relief'];
-const FINISH: readonly Process[] = ['cadmium_plate', 'zinc_plate', 'anodize', 'chemical_film', 'passivation', 'embrittlement_relief'];
+const HEAT: readonly Process[] = [
+  'solution_heat_treat_and_age',
+  'solution_heat_treat',
+  'artificial_age',
+  'anneal',
+  'harden_and_temper',
+  'stress_relief',
+  'embrittlement_relief',
+];
+const FINISH: readonly Process[] = [
+  'cadmium_plate',
+  'zinc_plate',
+  'anodize',
+  'chemical_film',
+  'passivation',
+  'embrittlement_relief',
+];
 const NDT: readonly Process[] = ['fluorescent_penetrant', 'magnetic_particle', 'radiography', 'ultrasonic'];
 
 /** Two yards, four processors that both know, and their people. All invented. */
-export async function seedOrganisations(owner: OwnerDb, { since, today }: { since: Date; today: Date }): Promise<DemoOrganisations> {
+export async function seedOrganisations(
+  owner: OwnerDb,
+  { since, today }: { since: Date; today: Date },
+): Promise<DemoOrganisations> {
   const passwordHash = await hash(DEMO_PASSWORD);
   const [shopId, otherShopId] = [newId(), newId()];
   await owner.insert(shops).values([
-    { id: shopId, name: 'Merganser Cove Aircraft', address: ['Slip 9, Merganser Cove', 'Port Alder'], phone: '555 0190', zone: 'America/Los_Angeles', currency: 'USD', orderPrefix: 'MC', secondApprovalAboveMinor: 50_000, createdAt: since },
-    { id: otherShopId, name: 'Larkspur Sheet Metal', address: ['2 Kiln Yard', 'Harrow Ferry'], phone: '555 0147', zone: 'America/Chicago', currency: 'USD', orderPrefix: 'LS', createdAt: since },
+    {
+      id: shopId,
+      name: 'Merganser Cove Aircraft',
+      address: ['Slip 9, Merganser Cove', 'Port Alder'],
+      phone: '555 0190',
+      zone: 'America/Los_Angeles',
+      currency: 'USD',
+      orderPrefix: 'MC',
+      secondApprovalAboveMinor: 50_000,
+      createdAt: since,
+    },
+    {
+      id: otherShopId,
+      name: 'Larkspur Sheet Metal',
+      address: ['2 Kiln Yard', 'Harrow Ferry'],
+      phone: '555 0147',
+      zone: 'America/Chicago',
+      currency: 'USD',
+      orderPrefix: 'LS',
+      createdAt: since,
+    },
   ]);
 
-  const person = async ({ name, email, roles, ...organisation }: { name: string; email: string; roles: readonly Role[] } & ({ shopId: string } | { processorId: string })): Promise<DemoPerson> => {
+  const person = async ({
+    name,
+    email,
+    roles,
+    ...organisation
+  }: { name: string; email: string; roles: readonly Role[] } & (
+    { shopId: string } | { processorId: string }
+  )): Promise<DemoPerson> => {
     const id = newId();
     await owner.insert(users).values({ id, name, email, passwordHash, createdAt: since });
-    await owner.insert(memberships).values({ userId: id, roles: [...roles], ...organisation, createdAt: since });
+    await owner
+      .insert(memberships)
+      .values({ userId: id, roles: [...roles], ...organisation, createdAt: since });
     return { id, name, roles };
   };
-  const inShop = (name: string, email: string, roles: readonly Role[]) => person({ name, email: `${email}@merganser.test`, roles, shopId });
+  const inShop = (name: string, email: string, roles: readonly Role[]) =>
+    person({ name, email: `${email}@merganser.test`, roles, shopId });
 
   const people = {
     lead: await inShop('Liv Sandvik', 'liv', ['lead']),
@@ -65,16 +115,64 @@ export async function seedOrganisations(owner: OwnerDb, { since, today }: { sinc
     auditor: await inShop('Ada Fennimore', 'ada', ['auditor']),
     foreman: await inShop('Silas Quarrington', 'silas', ['lead', 'inspector', 'office']),
   };
-  const otherOwner = await person({ name: 'Corin Vale', email: 'owner@larkspur.test', roles: ['lead', 'inspector', 'office', 'admin'], shopId: otherShopId });
+  const otherOwner = await person({
+    name: 'Corin Vale',
+    email: 'owner@larkspur.test',
+    roles: ['lead', 'inspector', 'office', 'admin'],
+    shopId: otherShopId,
+  });
 
-  const processor = async ({ name, domain, contact, processes, validDays }: { name: string; domain: string; contact: string; processes: readonly Process[]; validDays: number }): Promise<DemoProcessor> => {
+  const processor = async ({
+    name,
+    domain,
+    contact,
+    processes,
+    validDays,
+  }: {
+    name: string;
+    domain: string;
+    contact: string;
+    processes: readonly Process[];
+    validDays: number;
+  }): Promise<DemoProcessor> => {
     const id = newId();
     const email = `desk@${domain}`;
-    await owner.insert(processors).values({ id, name, email, phone: '555 0112', address: ['Works Road', 'Tamarack Junction'], zone: 'America/Los_Angeles', createdAt: since });
+    await owner
+      .insert(processors)
+      .values({
+        id,
+        name,
+        email,
+        phone: '555 0112',
+        address: ['Works Road', 'Tamarack Junction'],
+        zone: 'America/Los_Angeles',
+        createdAt: since,
+      });
     const desk = await person({ name: contact, email, roles: ['processor'], processorId: id });
-    for (const [shop, reference] of [[shopId, 'Q-114'], [otherShopId, 'AP-7']] as const) {
-      await owner.insert(shopProcessors).values({ shopId: shop, processorId: id, contactName: contact, contactEmail: email, createdAt: since });
-      await owner.insert(approvals).values({ shopId: shop, processorId: id, reference: `${reference}-${id.slice(-3)}`, processes: [...processes], validFrom: dayOf(since), validTo: dayOf(addDays(today, validDays)), createdAt: since });
+    for (const [shop, reference] of [
+      [shopId, 'Q-114'],
+      [otherShopId, 'AP-7'],
+    ] as const) {
+      await owner
+        .insert(shopProcessors)
+        .values({
+          shopId: shop,
+          processorId: id,
+          contactName: contact,
+          contactEmail: email,
+          createdAt: since,
+        });
+      await owner
+        .insert(approvals)
+        .values({
+          shopId: shop,
+          processorId: id,
+          reference: `${reference}-${id.slice(-3)}`,
+          processes: [...processes],
+          validFrom: dayOf(since),
+          validTo: dayOf(addDays(today, validDays)),
+          createdAt: since,
+        });
     }
     return { id, name, contact, personId: desk.id, processes };
   };
@@ -85,10 +183,34 @@ export async function seedOrganisations(owner: OwnerDb, { since, today }: { sinc
     people,
     otherOwner,
     processors: {
-      thermal: await processor({ name: 'Galena Thermal', domain: 'galena-thermal.test', contact: 'Runa Holt', processes: HEAT, validDays: 21 }),
-      plating: await processor({ name: 'Sallow & Finch Plating', domain: 'sallowfinch.test', contact: 'Imre Vasko', processes: FINISH, validDays: 240 }),
-      inspection: await processor({ name: 'Dunlin Inspection', domain: 'dunlin.test', contact: 'Thea Marsh', processes: NDT, validDays: 320 }),
-      peening: await processor({ name: 'Cobble Street Peening and Surface Works', domain: 'cobblestreet.test', contact: 'Joaquim Ferro', processes: ['shot_peen', 'phosphate'], validDays: 400 }),
+      thermal: await processor({
+        name: 'Galena Thermal',
+        domain: 'galena-thermal.test',
+        contact: 'Runa Holt',
+        processes: HEAT,
+        validDays: 21,
+      }),
+      plating: await processor({
+        name: 'Sallow & Finch Plating',
+        domain: 'sallowfinch.test',
+        contact: 'Imre Vasko',
+        processes: FINISH,
+        validDays: 240,
+      }),
+      inspection: await processor({
+        name: 'Dunlin Inspection',
+        domain: 'dunlin.test',
+        contact: 'Thea Marsh',
+        processes: NDT,
+        validDays: 320,
+      }),
+      peening: await processor({
+        name: 'Cobble Street Peening and Surface Works',
+        domain: 'cobblestreet.test',
+        contact: 'Joaquim Ferro',
+        processes: ['shot_peen', 'phosphate'],
+        validDays: 400,
+      }),
     },
   };
 }

@@ -29,9 +29,22 @@ const style = StyleSheet.create({
 /** A form of one page, as a processor prints it: its head, what it is for, a table, what it states, a signature. */
 export function makeForm(form: Form): Promise<Buffer> {
   return renderPdf(
-    <Document title={form.title} author={form.from.name} creationDate={form.at} producer={form.from.name} creator={form.from.name}>
+    <Document
+      title={form.title}
+      author={form.from.name}
+      creationDate={form.at}
+      producer={form.from.name}
+      creator={form.from.name}
+    >
       <Page size="LETTER" style={{ ...style.page, fontFamily: 'Barlow' }}>
-        <View style={{ flexDirection: 'row', justifyContent: 'space-between', borderBottom: '1.5 solid #000', paddingBottom: 8 }}>
+        <View
+          style={{
+            flexDirection: 'row',
+            justifyContent: 'space-between',
+            borderBottom: '1.5 solid #000',
+            paddingBottom: 8,
+          }}
+        >
           <View>
             <Text style={style.house}>{form.from.name}</Text>
             <Text>{form.from.address}</Text>
@@ -72,9 +85,20 @@ export function makeForm(form: Form): Promise<Buffer> {
 
 function Row({ cells, head = false }: { cells: readonly string[]; head?: boolean }) {
   return (
-    <View style={{ flexDirection: 'row', ...(head ? { borderBottom: '1 solid #000' } : { borderTop: '0.5 solid #bbb' }) }}>
+    <View
+      style={{
+        flexDirection: 'row',
+        ...(head ? { borderBottom: '1 solid #000' } : { borderTop: '0.5 solid #bbb' }),
+      }}
+    >
       {cells.map((cell, at) => (
-        <Text key={at} style={{ ...style.cell, ...(head ? { color: '#555' } : { fontFamily: 'Spline Sans Mono', fontSize: 8.6 }) }}>
+        <Text
+          key={at}
+          style={{
+            ...style.cell,
+            ...(head ? { color: '#555' } : { fontFamily: 'Spline Sans Mono', fontSize: 8.6 }),
+          }}
+        >
           {cell}
         </Text>
       ))}

@@ -17,11 +17,27 @@ interface Proving {
 }
 
 /** The inspector reads the certificate, finds each requirement met, and signs for what came back and is covered. */
-export async function proveCertificate(ctx: Ctx, { batchId, certificateId, uncovered, datedOn }: Proving): Promise<void> {
+export async function proveCertificate(
+  ctx: Ctx,
+  { batchId, certificateId, uncovered, datedOn }: Proving,
+): Promise<void> {
   const { certificate, requirements, batch } = await getCertificate(ctx, { certificateId });
-  await recordCertificate(ctx, { certificateId, version: certificate.version, number: certificateNumber(batch.number, ctx.now), datedOn });
+  await recordCertificate(ctx, {
+    certificateId,
+    version: certificate.version,
+    number: certificateNumber(batch.number, ctx.now),
+    datedOn,
+  });
   for (const { id, limit, unit } of requirements) {
-    await decideRequirement(ctx, { certificateId, requirementId: id, version: null, stated: [limit, unit].filter(Boolean).join(' ') || 'stated', verdict: 'meets', overrideReason: null, note: '' });
+    await decideRequirement(ctx, {
+      certificateId,
+      requirementId: id,
+      version: null,
+      stated: [limit, unit].filter(Boolean).join(' ') || 'stated',
+      verdict: 'meets',
+      overrideReason: null,
+      note: '',
+    });
   }
   const read = await getCertificate(ctx, { certificateId });
   const { lines } = await getGate(ctx, { batchId });
@@ -34,7 +50,9 @@ export async function proveCertificate(ctx: Ctx, { batchId, certificateId, uncov
     certificateId,
     version: read.certificate.version,
     coverage,
-    decisions: read.requirements.flatMap(({ id, decision }) => (decision ? [{ requirementId: id, version: decision.version }] : [])),
+    decisions: read.requirements.flatMap(({ id, decision }) =>
+      decision ? [{ requirementId: id, version: decision.version }] : [],
+    ),
     password: DEMO_PASSWORD,
   });
 }

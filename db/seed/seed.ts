@@ -27,8 +27,22 @@ async function main(): Promise<void> {
     const cast = await seedOrganisations(drizzle(owner), { since: subDays(today, 365), today });
     await seedPaymentService(drizzle(owner), cast);
     const play = new StagePlay(stage.db, cast, today);
-    const ours = await openYard(play, { shopId: cast.shopId, lead: cast.people.lead, inspector: cast.people.inspector, office: cast.people.office, parts: catalogue(), stores: ['Rack A 1', 'Rack A 2', 'Bin cabinet, drawer 14', 'Float shelf'] });
-    const theirs = await openYard(play, { shopId: cast.otherShopId, lead: cast.otherOwner, inspector: cast.otherOwner, office: cast.otherOwner, parts: otherParts(), stores: ['Shelf 1'] });
+    const ours = await openYard(play, {
+      shopId: cast.shopId,
+      lead: cast.people.lead,
+      inspector: cast.people.inspector,
+      office: cast.people.office,
+      parts: catalogue(),
+      stores: ['Rack A 1', 'Rack A 2', 'Bin cabinet, drawer 14', 'Float shelf'],
+    });
+    const theirs = await openYard(play, {
+      shopId: cast.otherShopId,
+      lead: cast.otherOwner,
+      inspector: cast.otherOwner,
+      office: cast.otherOwner,
+      parts: otherParts(),
+      stores: ['Shelf 1'],
+    });
     await makeAssemblies(play, cast.people.lead);
     await playAll([...ours(CAMPAIGNS), ...theirs(OTHER_YARD)], today);
     await keepOldMailsBack(owner, today);
@@ -48,7 +62,10 @@ interface Yard {
 }
 
 /** Enters a yard's parts and stores, and hands back what turns campaigns into threads of the story. */
-async function openYard(play: StagePlay, { parts, stores, ...crew }: Yard): Promise<(campaigns: readonly Campaign[]) => Thread[]> {
+async function openYard(
+  play: StagePlay,
+  { parts, stores, ...crew }: Yard,
+): Promise<(campaigns: readonly Campaign[]) => Thread[]> {
   const opened = subDays(play.today, 364);
   const { ids, locationId } = await play.asPerson(
     { ...crew.lead, roles: ['lead', 'inspector', 'admin'] },
@@ -62,13 +79,21 @@ async function openYard(play: StagePlay, { parts, stores, ...crew }: Yard): Prom
     },
     crew.shopId,
   );
-  return (campaigns) => campaigns.map((campaign) => campaignThread({ play, crew: { ...crew, locationId }, parts: ids }, campaign));
+  return (campaigns) =>
+    campaigns.map((campaign) =>
+      campaignThread({ play, crew: { ...crew, locationId }, parts: ids }, campaign),
+    );
 }
 
 const makeAssemblies = (play: StagePlay, lead: DemoPerson): Promise<void> =>
   play.asPerson(lead, subDays(play.today, 60), async (ctx) => {
     for (const { name, neededInDays, needs } of ASSEMBLIES) {
-      await createAssembly(ctx, { name, neededOn: dayOf(addDays(play.today, neededInDays)), note: null, needs: needs.map(([partNumber, pieces]) => ({ partNumber, pieces })) });
+      await createAssembly(ctx, {
+        name,
+        neededOn: dayOf(addDays(play.today, neededInDays)),
+        note: null,
+        needs: needs.map(([partNumber, pieces]) => ({ partNumber, pieces })),
+      });
     }
   });
 
@@ -84,7 +109,14 @@ async function keepOldMailsBack(owner: pg.Pool, today: Date): Promise<void> {
 function otherParts(): PartInput[] {
   const [model] = catalogue();
   if (!model) throw new Error('the catalogue is empty');
-  const part = (number: string, name: string): PartInput => ({ ...model, number, name, revision: 'A', route: ROUTES.t42.steps.map((step) => ({ ...step })), endCondition: 'T42' });
+  const part = (number: string, name: string): PartInput => ({
+    ...model,
+    number,
+    name,
+    revision: 'A',
+    route: ROUTES.t42.steps.map((step) => ({ ...step })),
+    endCondition: 'T42',
+  });
   return [part('LS-20-114', 'Cowl flap bracket'), part('LS-31-002', 'Baggage door skin')];
 }
 

@@ -17,5 +17,10 @@ export const demoSignIns: readonly DemoSignIn[] = [
   { email: `jun@${SHOP}`, password: DEMO_PASSWORD, role: 'admin', name: 'Jun Okabe' },
   { email: `ada@${SHOP}`, password: DEMO_PASSWORD, role: 'auditor', name: 'Ada Fennimore' },
   { email: 'desk@galena-thermal.test', password: DEMO_PASSWORD, role: 'processor', name: 'Runa Holt' },
-  { email: 'owner@larkspur.test', password: DEMO_PASSWORD, role: 'every role, second shop', name: 'Corin Vale' },
+  {
+    email: 'owner@larkspur.test',
+    password: DEMO_PASSWORD,
+    role: 'every role, second shop',
+    name: 'Corin Vale',
+  },
 ];

@@ -13,17 +13,44 @@ export class StagePlay {
   ) {}
 
   /** A scene in the yard. */
-  asPerson<T>(person: DemoPerson, at: Date, work: (ctx: Ctx) => Promise<T>, shopId = this.cast.shopId): Promise<T> {
-    return this.within({ kind: 'shop', shopId, personId: person.id }, { kind: 'person', userId: person.id, name: person.name, roles: person.roles }, at, work);
+  asPerson<T>(
+    person: DemoPerson,
+    at: Date,
+    work: (ctx: Ctx) => Promise<T>,
+    shopId = this.cast.shopId,
+  ): Promise<T> {
+    return this.within(
+      { kind: 'shop', shopId, personId: person.id },
+      { kind: 'person', userId: person.id, name: person.name, roles: person.roles },
+      at,
+      work,
+    );
   }
 
   /** A scene at the processor, as its person at the desk. */
   asProcessor<T>(processor: DemoProcessor, at: Date, work: (ctx: Ctx) => Promise<T>): Promise<T> {
-    return this.within({ kind: 'processor', processorId: processor.id, batchId: null, personId: processor.personId }, { kind: 'person', userId: processor.personId, name: `${processor.contact}, ${processor.name}`, roles: ['processor'] }, at, work);
+    return this.within(
+      { kind: 'processor', processorId: processor.id, batchId: null, personId: processor.personId },
+      {
+        kind: 'person',
+        userId: processor.personId,
+        name: `${processor.contact}, ${processor.name}`,
+        roles: ['processor'],
+      },
+      at,
+      work,
+    );
   }
 
-  private within<T>(tenant: Tenant, actor: Ctx['actor'], now: Date, work: (ctx: Ctx) => Promise<T>): Promise<T> {
-    return withTenant(this.db, tenant, (tx) => work({ tenant, actor, tx, now, requestId: newId(), address: null }));
+  private within<T>(
+    tenant: Tenant,
+    actor: Ctx['actor'],
+    now: Date,
+    work: (ctx: Ctx) => Promise<T>,
+  ): Promise<T> {
+    return withTenant(this.db, tenant, (tx) =>
+      work({ tenant, actor, tx, now, requestId: newId(), address: null }),
+    );
   }
 }
 

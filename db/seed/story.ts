@@ -1,71 +1,398 @@
 import { SMOOTH, type Campaign } from './campaign';
 
 const smooth = (steps: number): Campaign['steps'] => Array.from({ length: steps }, () => SMOOTH);
-const rough = { ...SMOOTH, promises: [11, 15], shippedAfter: 14, receivedAfter: 15, papersAfter: 15, provedAfter: 16, invoicedAfter: 16, enteredAfter: 16, paidAfter: 16, releasedAfter: 17 };
+const rough = {
+  ...SMOOTH,
+  promises: [11, 15],
+  shippedAfter: 14,
+  receivedAfter: 15,
+  papersAfter: 15,
+  provedAfter: 16,
+  invoicedAfter: 16,
+  enteredAfter: 16,
+  paidAfter: 16,
+  releasedAfter: 17,
+};
 
 /** A year that went well, mostly: what is in stock and fitted today came from here. */
 const PAST: readonly Campaign[] = [
-  { startedDaysAgo: 352, parts: [['MC-1118-05', 12], ['MC-3301-01', 6]], steps: smooth(2) },
-  { startedDaysAgo: 338, parts: [['MC-1130-10', 4], ['MC-1130-11', 8]], steps: smooth(2) },
-  { startedDaysAgo: 325, parts: [['MC-1106-11', 20], ['MC-1106-12', 20], ['MC-1106-13', 14]], steps: [rough] },
-  { startedDaysAgo: 311, parts: [['MC-1134-05', 16], ['MC-1134-06', 16]], steps: smooth(3) },
-  { startedDaysAgo: 298, parts: [['MC-1120-01', 6], ['MC-1120-02', 6], ['MC-1120-07', 24]], steps: smooth(2) },
-  { startedDaysAgo: 284, parts: [['MC-1144-05', 6], ['MC-1148-01', 8]], steps: smooth(3) },
-  { startedDaysAgo: 270, parts: [['MC-1140-08', 24], ['MC-1144-02', 4], ['MC-3308-01', 10]], steps: smooth(1) },
-  { startedDaysAgo: 255, parts: [['MC-1102-01', 4], ['MC-1102-02', 4], ['MC-1102-04', 4]], steps: [SMOOTH, rough] },
-  { startedDaysAgo: 241, parts: [['MC-1148-03', 16], ['MC-3312-05', 12]], steps: smooth(1) },
-  { startedDaysAgo: 226, parts: [['MC-1134-01', 4], ['MC-1134-02', 4]], steps: smooth(4) },
-  { startedDaysAgo: 212, parts: [['MC-2201-01', 4], ['MC-2201-02', 4], ['MC-2201-09', 8]], steps: smooth(2) },
-  { startedDaysAgo: 198, parts: [['MC-1124-03', 6], ['MC-1144-01', 2]], steps: smooth(1) },
-  { startedDaysAgo: 183, parts: [['MC-3304-01', 4], ['MC-3304-02', 4], ['MC-2208-11', 8]], steps: smooth(2) },
-  { startedDaysAgo: 169, parts: [['MC-2216-01', 4], ['MC-2216-02', 8]], steps: smooth(3) },
-  { startedDaysAgo: 150, parts: [['MC-1114-22', 30], ['MC-2220-03', 12]], steps: [rough] },
-  { startedDaysAgo: 136, parts: [['MC-1130-14', 8], ['MC-2212-04', 4]], steps: smooth(1) },
-  { startedDaysAgo: 121, parts: [['MC-4401-01', 4], ['MC-2208-12', 6], ['MC-2212-01', 4]], steps: smooth(2) },
-  { startedDaysAgo: 104, parts: [['MC-1110-01', 4], ['MC-1110-02', 4]], steps: smooth(2) },
-  { startedDaysAgo: 92, parts: [['MC-1140-01', 2], ['MC-1140-02', 2], ['MC-4404-01', 2]], steps: smooth(2) },
+  {
+    startedDaysAgo: 352,
+    parts: [
+      ['MC-1118-05', 12],
+      ['MC-3301-01', 6],
+    ],
+    steps: smooth(2),
+  },
+  {
+    startedDaysAgo: 338,
+    parts: [
+      ['MC-1130-10', 4],
+      ['MC-1130-11', 8],
+    ],
+    steps: smooth(2),
+  },
+  {
+    startedDaysAgo: 325,
+    parts: [
+      ['MC-1106-11', 20],
+      ['MC-1106-12', 20],
+      ['MC-1106-13', 14],
+    ],
+    steps: [rough],
+  },
+  {
+    startedDaysAgo: 311,
+    parts: [
+      ['MC-1134-05', 16],
+      ['MC-1134-06', 16],
+    ],
+    steps: smooth(3),
+  },
+  {
+    startedDaysAgo: 298,
+    parts: [
+      ['MC-1120-01', 6],
+      ['MC-1120-02', 6],
+      ['MC-1120-07', 24],
+    ],
+    steps: smooth(2),
+  },
+  {
+    startedDaysAgo: 284,
+    parts: [
+      ['MC-1144-05', 6],
+      ['MC-1148-01', 8],
+    ],
+    steps: smooth(3),
+  },
+  {
+    startedDaysAgo: 270,
+    parts: [
+      ['MC-1140-08', 24],
+      ['MC-1144-02', 4],
+      ['MC-3308-01', 10],
+    ],
+    steps: smooth(1),
+  },
+  {
+    startedDaysAgo: 255,
+    parts: [
+      ['MC-1102-01', 4],
+      ['MC-1102-02', 4],
+      ['MC-1102-04', 4],
+    ],
+    steps: [SMOOTH, rough],
+  },
+  {
+    startedDaysAgo: 241,
+    parts: [
+      ['MC-1148-03', 16],
+      ['MC-3312-05', 12],
+    ],
+    steps: smooth(1),
+  },
+  {
+    startedDaysAgo: 226,
+    parts: [
+      ['MC-1134-01', 4],
+      ['MC-1134-02', 4],
+    ],
+    steps: smooth(4),
+  },
+  {
+    startedDaysAgo: 212,
+    parts: [
+      ['MC-2201-01', 4],
+      ['MC-2201-02', 4],
+      ['MC-2201-09', 8],
+    ],
+    steps: smooth(2),
+  },
+  {
+    startedDaysAgo: 198,
+    parts: [
+      ['MC-1124-03', 6],
+      ['MC-1144-01', 2],
+    ],
+    steps: smooth(1),
+  },
+  {
+    startedDaysAgo: 183,
+    parts: [
+      ['MC-3304-01', 4],
+      ['MC-3304-02', 4],
+      ['MC-2208-11', 8],
+    ],
+    steps: smooth(2),
+  },
+  {
+    startedDaysAgo: 169,
+    parts: [
+      ['MC-2216-01', 4],
+      ['MC-2216-02', 8],
+    ],
+    steps: smooth(3),
+  },
+  {
+    startedDaysAgo: 150,
+    parts: [
+      ['MC-1114-22', 30],
+      ['MC-2220-03', 12],
+    ],
+    steps: [rough],
+  },
+  {
+    startedDaysAgo: 136,
+    parts: [
+      ['MC-1130-14', 8],
+      ['MC-2212-04', 4],
+    ],
+    steps: smooth(1),
+  },
+  {
+    startedDaysAgo: 121,
+    parts: [
+      ['MC-4401-01', 4],
+      ['MC-2208-12', 6],
+      ['MC-2212-01', 4],
+    ],
+    steps: smooth(2),
+  },
+  {
+    startedDaysAgo: 104,
+    parts: [
+      ['MC-1110-01', 4],
+      ['MC-1110-02', 4],
+    ],
+    steps: smooth(2),
+  },
+  {
+    startedDaysAgo: 92,
+    parts: [
+      ['MC-1140-01', 2],
+      ['MC-1140-02', 2],
+      ['MC-4404-01', 2],
+    ],
+    steps: smooth(2),
+  },
   { startedDaysAgo: 78, parts: [['MC-1118-06', 24]], steps: smooth(1) },
-  { startedDaysAgo: 61, parts: [['MC-1150-02', 20], ['MC-1120-07', 20]], steps: smooth(2) },
+  {
+    startedDaysAgo: 61,
+    parts: [
+      ['MC-1150-02', 20],
+      ['MC-1120-07', 20],
+    ],
+    steps: smooth(2),
+  },
 ];
 
-const out = { ...SMOOTH, shippedAfter: undefined, receivedAfter: undefined, papersAfter: undefined, provedAfter: undefined, invoicedAfter: undefined, enteredAfter: undefined, paidAfter: undefined, releasedAfter: undefined };
+const out = {
+  ...SMOOTH,
+  shippedAfter: undefined,
+  receivedAfter: undefined,
+  papersAfter: undefined,
+  provedAfter: undefined,
+  invoicedAfter: undefined,
+  enteredAfter: undefined,
+  paidAfter: undefined,
+  releasedAfter: undefined,
+};
 type Plot = Campaign['steps'][number];
 /** Fields that are undefined are left out: they did not happen. */
-const plot = (given: { [K in keyof Plot]: Plot[K] | undefined }): Plot => Object.fromEntries(Object.entries(given).filter(([, value]) => value !== undefined)) as unknown as Plot;
+const plot = (given: { [K in keyof Plot]: Plot[K] | undefined }): Plot =>
+  Object.fromEntries(Object.entries(given).filter(([, value]) => value !== undefined)) as unknown as Plot;
 
 /** What is under way today: a batch in every stage, two late, one held, one with an invoice that does not match. */
 const PRESENT: readonly Campaign[] = [
   // Late at the inspection house, and the spreader bars are already waiting.
-  { startedDaysAgo: 33, parts: [['MC-1130-10', 4], ['MC-1130-11', 8]], steps: [plot({ ...out, wantedInDays: 18, promises: [12], acknowledgedAfter: 3 })] },
+  {
+    startedDaysAgo: 33,
+    parts: [
+      ['MC-1130-10', 4],
+      ['MC-1130-11', 8],
+    ],
+    steps: [plot({ ...out, wantedInDays: 18, promises: [12], acknowledgedAfter: 3 })],
+  },
   // Late at the heat treater after a broken promise.
-  { startedDaysAgo: 24, parts: [['MC-1106-11', 14], ['MC-1106-12', 15], ['MC-1106-13', 12]], steps: [plot({ ...out, promises: [12, 17], question: { after: 9, body: 'Is the bend radius on the aft stiffener .09 or .06?' } })] },
+  {
+    startedDaysAgo: 24,
+    parts: [
+      ['MC-1106-11', 14],
+      ['MC-1106-12', 15],
+      ['MC-1106-13', 12],
+    ],
+    steps: [
+      plot({
+        ...out,
+        promises: [12, 17],
+        question: { after: 9, body: 'Is the bend radius on the aft stiffener .09 or .06?' },
+      }),
+    ],
+  },
   // Held: the bake began too late.
-  { startedDaysAgo: 56, parts: [['MC-1134-05', 16]], steps: [SMOOTH, SMOOTH, plot({ ...out, promises: [9], shippedAfter: 8, receivedAfter: 9, papersAfter: 9, held: { after: 10, pieces: 16, what: 'Bake began 6 h 10 min after plating; the order says 4 h' } })] },
+  {
+    startedDaysAgo: 56,
+    parts: [['MC-1134-05', 16]],
+    steps: [
+      SMOOTH,
+      SMOOTH,
+      plot({
+        ...out,
+        promises: [9],
+        shippedAfter: 8,
+        receivedAfter: 9,
+        papersAfter: 9,
+        held: { after: 10, pieces: 16, what: 'Bake began 6 h 10 min after plating; the order says 4 h' },
+      }),
+    ],
+  },
   // Papers in, to prove.
-  { startedDaysAgo: 16, parts: [['MC-1102-01', 4], ['MC-1102-02', 4], ['MC-1102-03', 4], ['MC-1102-04', 4]], steps: [plot({ ...out, promises: [12], shippedAfter: 11, receivedAfter: 13, papersAfter: 13 })] },
+  {
+    startedDaysAgo: 16,
+    parts: [
+      ['MC-1102-01', 4],
+      ['MC-1102-02', 4],
+      ['MC-1102-03', 4],
+      ['MC-1102-04', 4],
+    ],
+    steps: [plot({ ...out, promises: [12], shippedAfter: 11, receivedAfter: 13, papersAfter: 13 })],
+  },
   // A certificate for 40 of 41 pieces, signed for 40.
-  { startedDaysAgo: 19, parts: [['MC-1148-03', 41]], steps: [plot({ ...out, promises: [11], shippedAfter: 11, receivedAfter: 13, papersAfter: 13, uncovered: 1, provedAfter: 15 })] },
+  {
+    startedDaysAgo: 19,
+    parts: [['MC-1148-03', 41]],
+    steps: [
+      plot({
+        ...out,
+        promises: [11],
+        shippedAfter: 11,
+        receivedAfter: 13,
+        papersAfter: 13,
+        uncovered: 1,
+        provedAfter: 15,
+      }),
+    ],
+  },
   // Proved, and the invoice asks for a copy that nobody ordered.
-  { startedDaysAgo: 21, parts: [['MC-3301-08', 20]], steps: [plot({ ...out, promises: [12], shippedAfter: 11, receivedAfter: 13, papersAfter: 13, provedAfter: 15, invoicedAfter: 16, invoiceExtra: { description: 'Copy of certification', amountMinor: 2_500 }, enteredAfter: 17 })] },
+  {
+    startedDaysAgo: 21,
+    parts: [['MC-3301-08', 20]],
+    steps: [
+      plot({
+        ...out,
+        promises: [12],
+        shippedAfter: 11,
+        receivedAfter: 13,
+        papersAfter: 13,
+        provedAfter: 15,
+        invoicedAfter: 16,
+        invoiceExtra: { description: 'Copy of certification', amountMinor: 2_500 },
+        enteredAfter: 17,
+      }),
+    ],
+  },
   // Paid, to release.
-  { startedDaysAgo: 20, parts: [['MC-1144-05', 6], ['MC-1144-06', 10]], steps: [plot({ ...SMOOTH, releasedAfter: undefined })] },
+  {
+    startedDaysAgo: 20,
+    parts: [
+      ['MC-1144-05', 6],
+      ['MC-1144-06', 10],
+    ],
+    steps: [plot({ ...SMOOTH, releasedAfter: undefined })],
+  },
   // In stock since yesterday.
-  { startedDaysAgo: 17, parts: [['MC-1140-08', 18], ['MC-3308-02', 12]], steps: [plot({ ...SMOOTH, paidAfter: 15, releasedAfter: 15 })] },
+  {
+    startedDaysAgo: 17,
+    parts: [
+      ['MC-1140-08', 18],
+      ['MC-3308-02', 12],
+    ],
+    steps: [plot({ ...SMOOTH, paidAfter: 15, releasedAfter: 15 })],
+  },
   // At the processor, in time.
   { startedDaysAgo: 9, parts: [['MC-1134-09', 60]], steps: [plot({ ...out, promises: [15] })] },
-  { startedDaysAgo: 11, parts: [['MC-1120-01', 8], ['MC-1120-02', 8], ['MC-1120-07', 32]], steps: [plot({ ...out, promises: [18], question: { after: 8, body: 'Line 3: may we rack the retainers on the flange? It leaves a mark of 2 mm.' } })] },
-  { startedDaysAgo: 27, parts: [['MC-2201-01', 4], ['MC-2201-02', 4], ['MC-2201-03', 4]], steps: [SMOOTH, plot({ ...out, promises: [17] })] },
+  {
+    startedDaysAgo: 11,
+    parts: [
+      ['MC-1120-01', 8],
+      ['MC-1120-02', 8],
+      ['MC-1120-07', 32],
+    ],
+    steps: [
+      plot({
+        ...out,
+        promises: [18],
+        question: {
+          after: 8,
+          body: 'Line 3: may we rack the retainers on the flange? It leaves a mark of 2 mm.',
+        },
+      }),
+    ],
+  },
+  {
+    startedDaysAgo: 27,
+    parts: [
+      ['MC-2201-01', 4],
+      ['MC-2201-02', 4],
+      ['MC-2201-03', 4],
+    ],
+    steps: [SMOOTH, plot({ ...out, promises: [17] })],
+  },
   // Part of it is back.
-  { startedDaysAgo: 30, parts: [['MC-1140-01', 2], ['MC-1140-02', 2]], steps: [SMOOTH, plot({ ...out, promises: [16], receivedAfter: 10, missing: 1 })] },
+  {
+    startedDaysAgo: 30,
+    parts: [
+      ['MC-1140-01', 2],
+      ['MC-1140-02', 2],
+    ],
+    steps: [SMOOTH, plot({ ...out, promises: [16], receivedAfter: 10, missing: 1 })],
+  },
   // Sent, no date yet.
-  { startedDaysAgo: 4, parts: [['MC-1118-06', 48], ['MC-2220-03', 18]], steps: [plot({ ...out, promises: [], acknowledgedAfter: 2 })] },
+  {
+    startedDaysAgo: 4,
+    parts: [
+      ['MC-1118-06', 48],
+      ['MC-2220-03', 18],
+    ],
+    steps: [plot({ ...out, promises: [], acknowledgedAfter: 2 })],
+  },
   // Left yesterday, not acknowledged.
-  { startedDaysAgo: 3, parts: [['MC-1144-01', 4]], steps: [plot({ ...out, acknowledgedAfter: undefined, promises: [], wantedInDays: 16 })] },
+  {
+    startedDaysAgo: 3,
+    parts: [['MC-1144-01', 4]],
+    steps: [plot({ ...out, acknowledgedAfter: undefined, promises: [], wantedInDays: 16 })],
+  },
   // Being built: one should have left, one leaves the day after tomorrow.
-  { startedDaysAgo: 5, parts: [['MC-3301-01', 6], ['MC-3301-02', 48]], steps: [plot({ ...out, leavesInDays: 3, dispatchedAfter: undefined, wantedInDays: 17 })] },
-  { startedDaysAgo: 2, parts: [['MC-2204-01', 4], ['MC-2204-02', 4]], steps: [plot({ ...out, leavesInDays: 3, dispatchedAfter: undefined, wantedInDays: 16 })] },
+  {
+    startedDaysAgo: 5,
+    parts: [
+      ['MC-3301-01', 6],
+      ['MC-3301-02', 48],
+    ],
+    steps: [plot({ ...out, leavesInDays: 3, dispatchedAfter: undefined, wantedInDays: 17 })],
+  },
+  {
+    startedDaysAgo: 2,
+    parts: [
+      ['MC-2204-01', 4],
+      ['MC-2204-02', 4],
+    ],
+    steps: [plot({ ...out, leavesInDays: 3, dispatchedAfter: undefined, wantedInDays: 16 })],
+  },
   // Lots that wait for their first step.
-  { startedDaysAgo: 2, parts: [['MC-1114-21', 8], ['MC-1114-22', 12], ['MC-1110-01', 2], ['MC-2212-04', 4], ['MC-1150-01', 20], ['MC-2216-01', 4]], steps: [] },
+  {
+    startedDaysAgo: 2,
+    parts: [
+      ['MC-1114-21', 8],
+      ['MC-1114-22', 12],
+      ['MC-1110-01', 2],
+      ['MC-2212-04', 4],
+      ['MC-1150-01', 20],
+      ['MC-2216-01', 4],
+    ],
+    steps: [],
+  },
 ];
 
 export const CAMPAIGNS: readonly Campaign[] = [...PAST, ...PRESENT];

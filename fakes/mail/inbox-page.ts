@@ -7,7 +7,12 @@ export function inboxPage(messages: readonly StoredMessage[], to: string): strin
 <button>Show</button>${to ? '<a href="/">Show all</a>' : ''}
 </form>`;
   const list = messages.length === 0 ? `<p class="empty">${emptySentence(to)}</p>` : table(messages);
-  return page({ title: 'Inbox', heading: 'Inbox', wide: true, body: `<h1>Mail sent by this installation</h1>${filter}${list}` });
+  return page({
+    title: 'Inbox',
+    heading: 'Inbox',
+    wide: true,
+    body: `<h1>Mail sent by this installation</h1>${filter}${list}`,
+  });
 }
 
 export type MessageView = 'html' | 'text' | 'raw';
@@ -20,7 +25,10 @@ export function messagePage(message: StoredMessage, view: MessageView, raw: stri
     ['raw', 'As sent'],
   ];
   const nav = tabs
-    .map(([key, label]) => `<a href="/message/${message.id}?view=${key}"${key === view ? ' aria-current="page"' : ''}>${label}</a>`)
+    .map(
+      ([key, label]) =>
+        `<a href="/message/${message.id}?view=${key}"${key === view ? ' aria-current="page"' : ''}>${label}</a>`,
+    )
     .join('');
   const body = `<h1>${escapeHtml(message.subject)}</h1>
 <dl>
@@ -45,7 +53,9 @@ function viewOf(message: StoredMessage, view: MessageView, raw: string): string 
 export function framedHtml(message: StoredMessage): string {
   const withPictures = message.attachments.reduce(
     (html, { contentId }, index) =>
-      contentId === null ? html : html.replaceAll(`cid:${contentId}`, `/messages/${message.id}/attachments/${index}`),
+      contentId === null
+        ? html
+        : html.replaceAll(`cid:${contentId}`, `/messages/${message.id}/attachments/${index}`),
     message.html,
   );
   return `<base target="_blank">${withPictures}`;
@@ -72,7 +82,9 @@ function attachmentRow({ id, attachments }: StoredMessage): string {
 }
 
 function emptySentence(to: string): string {
-  return to ? `Nothing has been sent to ${escapeHtml(to)}.` : 'Nothing has been sent yet. Dispatch a batch and its mail appears here.';
+  return to
+    ? `Nothing has been sent to ${escapeHtml(to)}.`
+    : 'Nothing has been sent yet. Dispatch a batch and its mail appears here.';
 }
 
 function readableTime(iso: string): string {

@@ -26,7 +26,11 @@ export interface Inbox {
  *   DELETE /messages?to=  /messages/:id
  *   POST   /control {"fail": "none" | "refuse" | "defer" | "reject" | "drop"}
  */
-export async function serveInbox(inbox: Inbox, request: IncomingMessage, response: ServerResponse): Promise<void> {
+export async function serveInbox(
+  inbox: Inbox,
+  request: IncomingMessage,
+  response: ServerResponse,
+): Promise<void> {
   const { pathname, searchParams } = new URL(request.url ?? '/', 'http://inbox.local');
   const [section = '', id, part, index] = pathname.split('/').slice(1);
   const to = searchParams.get('to') ?? '';
@@ -48,9 +52,15 @@ export async function serveInbox(inbox: Inbox, request: IncomingMessage, respons
   return answerJson(response, 404, { error: 'There is no such page.' });
 }
 
-async function showMessage(inbox: Inbox, message: StoredMessage, asked: string | null, response: ServerResponse): Promise<void> {
+async function showMessage(
+  inbox: Inbox,
+  message: StoredMessage,
+  asked: string | null,
+  response: ServerResponse,
+): Promise<void> {
   const fallback: MessageView = message.html ? 'html' : 'text';
-  const view: MessageView = asked === 'raw' || asked === 'text' || (asked === 'html' && message.html) ? asked : fallback;
+  const view: MessageView =
+    asked === 'raw' || asked === 'text' || (asked === 'html' && message.html) ? asked : fallback;
   const raw = view === 'raw' ? (await inbox.store.raw(message)).toString('utf8') : '';
   answerHtml(response, messagePage(message, view, raw));
 }
@@ -64,11 +74,13 @@ async function servePart(
   if (part === undefined) return answerJson(response, 200, message);
   if (part === 'html') {
     return answerHtml(response, framedHtml(message), {
-      'content-security-policy': 'sandbox allow-popups allow-popups-to-escape-sandbox allow-top-navigation-by-user-activation',
+      'content-security-policy':
+        'sandbox allow-popups allow-popups-to-escape-sandbox allow-top-navigation-by-user-activation',
     });
   }
   const raw = await inbox.store.raw(message);
-  if (part === 'raw') return answerWith(response, { status: 200, type: 'text/plain; charset=utf-8', body: raw });
+  if (part === 'raw')
+    return answerWith(response, { status: 200, type: 'text/plain; charset=utf-8', body: raw });
   if (part === 'attachments') {
     const found = await readAttachment(raw, Number(index));
     if (found) return answerWith(response, attachmentAnswer(found));

@@ -39,7 +39,12 @@ export interface Envelope {
   recipients: string[];
 }
 
-export async function readMessage(id: string, raw: Buffer, envelope: Envelope, receivedAt: Date): Promise<StoredMessage> {
+export async function readMessage(
+  id: string,
+  raw: Buffer,
+  envelope: Envelope,
+  receivedAt: Date,
+): Promise<StoredMessage> {
   const mail = await simpleParser(raw, { skipImageLinks: true, skipTextToHtml: true });
   const html = mail.html || '';
   return {
@@ -52,7 +57,9 @@ export async function readMessage(id: string, raw: Buffer, envelope: Envelope, r
     replyTo: addressesOf(mail.replyTo),
     subject: mail.subject ?? '(no subject)',
     messageId: mail.messageId ?? null,
-    headers: Object.fromEntries(mail.headerLines.map(({ key, line }) => [key, line.slice(key.length + 1).trim()])),
+    headers: Object.fromEntries(
+      mail.headerLines.map(({ key, line }) => [key, line.slice(key.length + 1).trim()]),
+    ),
     text: mail.text ?? '',
     html,
     links: linksIn(html, mail.text ?? ''),
@@ -79,11 +86,15 @@ function describeAttachment(attachment: Attachment): StoredAttachment {
 function addressesOf(field: AddressObject | AddressObject[] | undefined): string[] {
   if (field === undefined) return [];
   const objects = Array.isArray(field) ? field : [field];
-  return objects.flatMap(({ value }) => value).flatMap(({ address }) => (address ? [address.toLowerCase()] : []));
+  return objects
+    .flatMap(({ value }) => value)
+    .flatMap(({ address }) => (address ? [address.toLowerCase()] : []));
 }
 
 function linksIn(html: string, text: string): string[] {
-  const inHtml = [...html.matchAll(/href="(https?:[^"]+)"/g)].map(([, link]) => (link ?? '').replaceAll('&amp;', '&'));
+  const inHtml = [...html.matchAll(/href="(https?:[^"]+)"/g)].map(([, link]) =>
+    (link ?? '').replaceAll('&amp;', '&'),
+  );
   const inText = [...text.matchAll(/https?:\/\/[^\s<>"')\]]+/g)].map(([link]) => link);
   return [...new Set([...inHtml, ...inText])];
 }

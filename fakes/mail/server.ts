@@ -23,7 +23,12 @@ export interface MailServer {
 }
 
 /** A mail server that delivers to a folder, with an inbox page to read it. */
-export async function startMailServer({ smtpPort, httpPort, dir, host = '127.0.0.1' }: MailServerOptions): Promise<MailServer> {
+export async function startMailServer({
+  smtpPort,
+  httpPort,
+  dir,
+  host = '127.0.0.1',
+}: MailServerOptions): Promise<MailServer> {
   const store = await MailStore.open(dir);
   let failure: MailFailure = 'none';
 

@@ -43,12 +43,21 @@ export function startSmtp({ store, port, host, failure }: SmtpOptions): Promise<
           if (failure() === 'drop') return cutConnection(server, session);
           done(failure() === 'defer' ? refusal(451, 'Try again later') : null);
         },
-        (error: unknown) => done(error instanceof RangeError ? refusal(552, error.message) : refusal(451, 'The message could not be kept')),
+        (error: unknown) =>
+          done(
+            error instanceof RangeError
+              ? refusal(552, error.message)
+              : refusal(451, 'The message could not be kept'),
+          ),
       );
     },
   });
 
-  async function keepMessage(into: MailStore, stream: SMTPServerDataStream, session: SMTPServerSession): Promise<void> {
+  async function keepMessage(
+    into: MailStore,
+    stream: SMTPServerDataStream,
+    session: SMTPServerSession,
+  ): Promise<void> {
     const chunks: Buffer[] = [];
     for await (const chunk of stream as AsyncIterable<Buffer>) chunks.push(chunk);
     if (stream.sizeExceeded) throw new RangeError('The message is larger than 60 MB');
@@ -78,7 +87,10 @@ function refusal(responseCode: number, message: string): Error {
 }
 
 function cutConnection(server: SMTPServer, session: SMTPServerSession): void {
-  for (const connection of server.connections as Set<{ session: SMTPServerSession; _socket: { destroy(): void } }>) {
+  for (const connection of server.connections as Set<{
+    session: SMTPServerSession;
+    _socket: { destroy(): void };
+  }>) {
     if (connection.session.id === session.id) connection._socket.destroy();
   }
 }

@@ -41,8 +41,17 @@ export function createAccount(call: Call): Account {
     payouts_enabled: false,
     details_submitted: false,
     capabilities: Object.fromEntries(requested.map((name) => [name, 'inactive' as const])),
-    requirements: { currently_due: ['external_account', 'tos_acceptance.date'], past_due: [], disabled_reason: 'requirements.past_due' },
-    external_accounts: { object: 'list', data: [], has_more: false, url: `/v1/accounts/${id}/external_accounts` },
+    requirements: {
+      currently_due: ['external_account', 'tos_acceptance.date'],
+      past_due: [],
+      disabled_reason: 'requirements.past_due',
+    },
+    external_accounts: {
+      object: 'list',
+      data: [],
+      has_more: false,
+      url: `/v1/accounts/${id}/external_accounts`,
+    },
     metadata: params.metadata ?? {},
   };
   call.state.accounts[id] = account;
@@ -99,14 +108,22 @@ export function createAccountLink(call: Call) {
 }
 
 /** What the hosted page does when its form is sent. */
-export function completeOnboarding(call: Call, accountId: string, bank: { name: string; last4: string }): Account {
+export function completeOnboarding(
+  call: Call,
+  accountId: string,
+  bank: { name: string; last4: string },
+): Account {
   const account = mustFind(call.state.accounts, accountId, 'account');
   account.details_submitted = true;
   account.charges_enabled = true;
   account.payouts_enabled = true;
-  account.capabilities = Object.fromEntries(Object.keys(account.capabilities).map((name) => [name, 'active' as const]));
+  account.capabilities = Object.fromEntries(
+    Object.keys(account.capabilities).map((name) => [name, 'active' as const]),
+  );
   account.requirements = { currently_due: [], past_due: [], disabled_reason: null };
-  account.external_accounts.data = [{ id: newPaymentId('ba'), object: 'bank_account', bank_name: bank.name, last4: bank.last4 }];
+  account.external_accounts.data = [
+    { id: newPaymentId('ba'), object: 'bank_account', bank_name: bank.name, last4: bank.last4 },
+  ];
   emitEvent(call, 'account.updated', account, account.id);
   return account;
 }

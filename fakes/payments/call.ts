@@ -36,7 +36,11 @@ export function mustFind<T>(things: Record<string, T>, id: string, noun: string,
 }
 
 /** Newest first, from after a given id, as every list on the wire. */
-export function listOf<T extends { id: string; created: number }>(things: Record<string, T>, form: Form, url: string) {
+export function listOf<T extends { id: string; created: number }>(
+  things: Record<string, T>,
+  form: Form,
+  url: string,
+) {
   const limit = Math.min(Math.max(Number(form['limit'] ?? 10), 1), 100);
   const after = form['starting_after'];
   // Later entries of one second come first too: the order of making is the order of the keys.

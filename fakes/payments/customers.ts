@@ -43,7 +43,8 @@ export function updateCustomer(call: Call): Customer {
   const params = readParams(CustomerParams, call.form);
   const customer = getCustomer(call);
   const method = params.invoice_settings?.default_payment_method;
-  if (method !== undefined) mustFind(call.state.paymentMethods, method, 'payment_method', 'invoice_settings[default_payment_method]');
+  if (method !== undefined)
+    mustFind(call.state.paymentMethods, method, 'payment_method', 'invoice_settings[default_payment_method]');
 
   customer.name = params.name ?? customer.name;
   customer.email = params.email ?? customer.email;

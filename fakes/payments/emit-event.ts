@@ -16,5 +16,11 @@ export function emitEvent(call: Call, type: string, thing: object, account?: str
     pending_webhooks: 1,
     request: { id: call.requestId, idempotency_key: call.idempotencyKey },
   };
-  call.state.deliveries.push({ event: id, attempts: 0, nextAtMs: call.nowMs, state: 'waiting', lastAnswer: null });
+  call.state.deliveries.push({
+    event: id,
+    attempts: 0,
+    nextAtMs: call.nowMs,
+    state: 'waiting',
+    lastAnswer: null,
+  });
 }

@@ -24,7 +24,10 @@ export function readParams<Shape extends z.ZodType>(shape: Shape, form: Form): z
 export const flag = z.enum(['true', 'false']).transform((word) => word === 'true');
 export const metadata = z.record(z.string(), z.string());
 export const expand = z.array(z.string());
-export const wholeNumber = z.string().regex(/^-?\d+$/, 'Invalid integer').transform(Number);
+export const wholeNumber = z
+  .string()
+  .regex(/^-?\d+$/, 'Invalid integer')
+  .transform(Number);
 
 function place(into: Form, keys: string[], value: string): void {
   const [key = '', ...rest] = keys;
@@ -50,14 +53,21 @@ function listsOf(value: FormValue): FormValue {
 
 function refusalOf(error: z.ZodError): Error {
   const issue = error.issues[0];
-  const param = (keys: readonly PropertyKey[]) => keys.map((key, at) => (at === 0 ? String(key) : `[${String(key)}]`)).join('');
+  const param = (keys: readonly PropertyKey[]) =>
+    keys.map((key, at) => (at === 0 ? String(key) : `[${String(key)}]`)).join('');
   if (issue?.code === 'unrecognized_keys') {
     const name = param([...issue.path, issue.keys[0] ?? '']);
-    return invalid(`Received a parameter this stand-in does not know: ${name}`, { code: 'parameter_unknown', param: name });
+    return invalid(`Received a parameter this stand-in does not know: ${name}`, {
+      code: 'parameter_unknown',
+      param: name,
+    });
   }
   const name = param(issue?.path ?? []);
   const isMissing = issue?.code === 'invalid_type' && issue.input === undefined;
   return isMissing
     ? invalid(`Missing required param: ${name}.`, { code: 'parameter_missing', param: name })
-    : invalid(`Invalid ${name}: ${issue?.message ?? 'not readable'}`, { code: 'parameter_invalid', param: name });
+    : invalid(`Invalid ${name}: ${issue?.message ?? 'not readable'}`, {
+        code: 'parameter_invalid',
+        param: name,
+      });
 }

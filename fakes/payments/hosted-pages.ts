@@ -9,23 +9,42 @@ import { TEST_METHODS } from './test-methods';
 import type { PaymentsWorld } from './world';
 
 /** The page behind an onboarding link: a processor says where its money is to go. */
-export async function serveOnboarding(world: PaymentsWorld, token: string, { request, response }: Exchange): Promise<void> {
+export async function serveOnboarding(
+  world: PaymentsWorld,
+  token: string,
+  { request, response }: Exchange,
+): Promise<void> {
   const link = world.store.state.onboardingLinks[token];
   if (link === undefined) return answerGone(response);
   if (link.isUsed || link.expiresAt < world.now()) return redirectTo(response, link.refreshUrl);
-  if (request.method !== 'POST') return answerHtml(response, onboardingPage(world.store.state.accounts[link.account]?.business_profile.name ?? ''));
+  if (request.method !== 'POST')
+    return answerHtml(
+      response,
+      onboardingPage(world.store.state.accounts[link.account]?.business_profile.name ?? ''),
+    );
 
   const form = new URLSearchParams(await readBody(request));
   const number = (form.get('account_number') ?? '').replace(/\D/g, '');
-  if (number.length < 4) return answerHtml(response, onboardingPage(form.get('name') ?? '', 'An account number has at least four digits.'));
+  if (number.length < 4)
+    return answerHtml(
+      response,
+      onboardingPage(form.get('name') ?? '', 'An account number has at least four digits.'),
+    );
   link.isUsed = true;
-  completeOnboarding(callFor(world), link.account, { name: form.get('bank') || 'Test Bank', last4: number.slice(-4) });
+  completeOnboarding(callFor(world), link.account, {
+    name: form.get('bank') || 'Test Bank',
+    last4: number.slice(-4),
+  });
   world.changed();
   redirectTo(response, link.returnUrl);
 }
 
 /** The page behind a setup session: the office says how the shop pays. */
-export async function serveCheckout(world: PaymentsWorld, sessionId: string, { request, response }: Exchange): Promise<void> {
+export async function serveCheckout(
+  world: PaymentsWorld,
+  sessionId: string,
+  { request, response }: Exchange,
+): Promise<void> {
   const session = world.store.state.sessions[sessionId];
   if (session === undefined || session.status !== 'open') return answerGone(response);
   if (request.method !== 'POST') return answerHtml(response, checkoutPage(session.cancel_url));
@@ -63,7 +82,9 @@ ${problem ? `<p class="bad" role="alert">${escapeHtml(problem)}</p>` : ''}
 }
 
 function checkoutPage(cancelUrl: string | null): string {
-  const options = Object.entries(TEST_METHODS).map(([id, { label }]) => `<option value="${id}">${escapeHtml(label)}</option>`);
+  const options = Object.entries(TEST_METHODS).map(
+    ([id, { label }]) => `<option value="${id}">${escapeHtml(label)}</option>`,
+  );
   return page({
     title: 'Save a payment method',
     heading: 'Payments',

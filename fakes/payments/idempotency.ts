@@ -35,13 +35,24 @@ export function savedAnswer(state: PaymentsState, request: KeyedRequest, nowMs: 
  * Only what took effect is kept, which includes a decline. A request refused for its parameters did nothing and may be
  * mended and sent again under its key, as with the real service.
  */
-export function keepAnswer(state: PaymentsState, request: KeyedRequest, answer: { status: number; body: unknown; nowMs: number }): void {
+export function keepAnswer(
+  state: PaymentsState,
+  request: KeyedRequest,
+  answer: { status: number; body: unknown; nowMs: number },
+): void {
   const { status, body, nowMs } = answer;
   if (status !== 200 && status !== 402) return;
-  state.answers[request.key] = { fingerprint: fingerprintOf(request), status, body: structuredClone(body), at: nowMs };
+  state.answers[request.key] = {
+    fingerprint: fingerprintOf(request),
+    status,
+    body: structuredClone(body),
+    at: nowMs,
+  };
 }
 
 function fingerprintOf({ method, path, body }: KeyedRequest): string {
   const sorted = [...new URLSearchParams(body)].map(([name, value]) => `${name}=${value}`).sort();
-  return createHash('sha256').update(JSON.stringify([method, path, sorted])).digest('hex');
+  return createHash('sha256')
+    .update(JSON.stringify([method, path, sorted]))
+    .digest('hex');
 }

@@ -31,7 +31,11 @@ function intentTable({ store: { state } }: PaymentsWorld): string {
 <td class="right mono keep">${amountOf(intent)}</td>
 <td>${statusOf(intent)}${intent.last_payment_error ? `<br><span class="caption">${escapeHtml(intent.last_payment_error.message)}</span>` : ''}</td>
 <td class="narrow-off">${escapeHtml(accountName(state.accounts, intent.transfer_data?.destination))}</td>
-<td class="narrow-off caption">${escapeHtml(Object.entries(intent.metadata).map(([key, value]) => `${key} ${value}`).join(', '))}</td>
+<td class="narrow-off caption">${escapeHtml(
+      Object.entries(intent.metadata)
+        .map(([key, value]) => `${key} ${value}`)
+        .join(', '),
+    )}</td>
 <td class="mono keep">${timeOf(intent.created)}</td>
 <td>${intent.status === 'processing' ? settleButtons(intent) : ''}</td></tr>`,
   );
@@ -58,7 +62,9 @@ function accountTable({ store: { state } }: PaymentsWorld): string {
   const accounts = Object.values(state.accounts);
   if (accounts.length === 0) return '<p class="empty">No processor has been connected yet.</p>';
   const rows = accounts.map(
-    (account) => `<tr><td>${escapeHtml(accountName(state.accounts, account.id))}</td><td class="mono">${escapeHtml(account.id)}</td>
+    (
+      account,
+    ) => `<tr><td>${escapeHtml(accountName(state.accounts, account.id))}</td><td class="mono">${escapeHtml(account.id)}</td>
 <td class="${account.payouts_enabled ? 'ok' : 'quiet'}">${account.payouts_enabled ? 'can receive' : 'not finished'}</td></tr>`,
   );
   return `<table><thead><tr><th>Name</th><th>Account</th><th>State</th></tr></thead><tbody>${rows.join('')}</tbody></table>`;
@@ -72,7 +78,9 @@ function settleButtons({ id }: PaymentIntent): string {
 }
 
 function button(action: string, fields: Record<string, string>, label: string): string {
-  const hidden = Object.entries(fields).map(([name, value]) => `<input type="hidden" name="${name}" value="${escapeHtml(value)}">`);
+  const hidden = Object.entries(fields).map(
+    ([name, value]) => `<input type="hidden" name="${name}" value="${escapeHtml(value)}">`,
+  );
   return `<form class="inline" method="post" action="${action}">${hidden.join('')}<button class="small">${label}</button></form> `;
 }
 

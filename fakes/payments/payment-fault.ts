@@ -17,7 +17,10 @@ export class PaymentFault extends Error {
   }
 }
 
-export function invalid(message: string, { code, param, status = 400 }: { code?: string; param?: string; status?: number } = {}): PaymentFault {
+export function invalid(
+  message: string,
+  { code, param, status = 400 }: { code?: string; param?: string; status?: number } = {},
+): PaymentFault {
   return new PaymentFault(status, {
     type: 'invalid_request_error',
     message,
@@ -28,5 +31,9 @@ export function invalid(message: string, { code, param, status = 400 }: { code?:
 
 /** Something named in the address is missing: 404. Named in a parameter: 400, as the real service answers. */
 export function missing(noun: string, id: string, param?: string): PaymentFault {
-  return invalid(`No such ${noun}: '${id}'`, { code: 'resource_missing', param: param ?? 'id', status: param === undefined ? 404 : 400 });
+  return invalid(`No such ${noun}: '${id}'`, {
+    code: 'resource_missing',
+    param: param ?? 'id',
+    status: param === undefined ? 404 : 400,
+  });
 }

@@ -20,7 +20,9 @@ const CreateParams = z.strictObject({
   customer: z.string().optional(),
   payment_method: z.string().optional(),
   payment_method_types: z.array(z.string()).optional(),
-  automatic_payment_methods: z.strictObject({ enabled: flag, allow_redirects: z.string().optional() }).optional(),
+  automatic_payment_methods: z
+    .strictObject({ enabled: flag, allow_redirects: z.string().optional() })
+    .optional(),
   confirm: flag.optional(),
   off_session: flag.optional(),
   description: z.string().optional(),
@@ -37,11 +39,17 @@ export function createPaymentIntent(call: Call): PaymentIntent {
   const params = readParams(CreateParams, call.form);
   mustBePayable(params.amount);
   if (params.customer !== undefined) mustFind(call.state.customers, params.customer, 'customer', 'customer');
-  if (params.transfer_data !== undefined) mustReceiveTransfers(call, params.transfer_data.destination, 'transfer_data[destination]');
+  if (params.transfer_data !== undefined)
+    mustReceiveTransfers(call, params.transfer_data.destination, 'transfer_data[destination]');
   if (params.confirm === true && params.payment_method === undefined) {
-    throw invalid('You cannot confirm this PaymentIntent because it is missing a payment method.', { code: 'payment_intent_unexpected_state' });
+    throw invalid('You cannot confirm this PaymentIntent because it is missing a payment method.', {
+      code: 'payment_intent_unexpected_state',
+    });
   }
-  const method = params.payment_method === undefined ? null : ownMethod(call, params.payment_method, params.customer ?? null);
+  const method =
+    params.payment_method === undefined
+      ? null
+      : ownMethod(call, params.payment_method, params.customer ?? null);
 
   const id = newPaymentId('pi');
   const intent: PaymentIntent = {
@@ -78,7 +86,9 @@ export function getPaymentIntent(call: Call): PaymentIntent {
 
 export function listPaymentIntents(call: Call) {
   const { customer } = call.form;
-  const own = Object.entries(call.state.paymentIntents).filter(([, intent]) => customer === undefined || intent.customer === customer);
+  const own = Object.entries(call.state.paymentIntents).filter(
+    ([, intent]) => customer === undefined || intent.customer === customer,
+  );
   return listOf(Object.fromEntries(own), call.form, '/v1/payment_intents');
 }
 
@@ -95,9 +105,12 @@ export function confirmPaymentIntent(call: Call): PaymentIntent {
   if (intent.status !== 'requires_confirmation' && intent.status !== 'requires_payment_method') {
     throw wrongState(intent, 'confirm');
   }
-  if (params.payment_method !== undefined) intent.payment_method = ownMethod(call, params.payment_method, intent.customer);
+  if (params.payment_method !== undefined)
+    intent.payment_method = ownMethod(call, params.payment_method, intent.customer);
   if (intent.payment_method === null) {
-    throw invalid('You cannot confirm this PaymentIntent because it is missing a payment method.', { code: 'payment_intent_unexpected_state' });
+    throw invalid('You cannot confirm this PaymentIntent because it is missing a payment method.', {
+      code: 'payment_intent_unexpected_state',
+    });
   }
   return confirmed(call, intent);
 }
@@ -148,28 +161,42 @@ function declineOf({ code = 'card_declined', declineCode = 'generic_decline' }: 
     expired_card: 'Your card has expired.',
     authentication_required: 'Your card was declined. This transaction requires authentication.',
   };
-  return { type: 'card_error', code, decline_code: declineCode, message: words[declineCode] ?? 'Your card was declined.' };
+  return {
+    type: 'card_error',
+    code,
+    decline_code: declineCode,
+    message: words[declineCode] ?? 'Your card was declined.',
+  };
 }
 
 /** A method saved by somebody else must never pay: the real service refuses it, so ours does. */
 function ownMethod(call: Call, methodId: string, customerId: string | null): string {
-  if (customerId !== null && methodId.startsWith('pm_card_')) return methodForCustomer(call, methodId, customerId).id;
-  if (customerId !== null && methodId.startsWith('pm_usBankAccount_')) return methodForCustomer(call, methodId, customerId).id;
+  if (customerId !== null && methodId.startsWith('pm_card_'))
+    return methodForCustomer(call, methodId, customerId).id;
+  if (customerId !== null && methodId.startsWith('pm_usBankAccount_'))
+    return methodForCustomer(call, methodId, customerId).id;
   const method = mustFind(call.state.paymentMethods, methodId, 'PaymentMethod', 'payment_method');
   if (method.customer !== customerId) {
-    throw invalid('The PaymentMethod does not belong to the Customer of this PaymentIntent.', { code: 'resource_missing', param: 'payment_method' });
+    throw invalid('The PaymentMethod does not belong to the Customer of this PaymentIntent.', {
+      code: 'resource_missing',
+      param: 'payment_method',
+    });
   }
   return method.id;
 }
 
-function transferDataOf(given: { destination: string; amount?: number | undefined } | undefined): PaymentIntent['transfer_data'] {
+function transferDataOf(
+  given: { destination: string; amount?: number | undefined } | undefined,
+): PaymentIntent['transfer_data'] {
   if (given === undefined) return null;
   return { destination: given.destination, ...(given.amount === undefined ? {} : { amount: given.amount }) };
 }
 
 function mustBePayable(amount: number): void {
-  if (amount < SMALLEST_AMOUNT) throw invalid('Amount must be at least 50 cents.', { code: 'amount_too_small', param: 'amount' });
-  if (amount > LARGEST_AMOUNT) throw invalid('Amount must be no more than 999,999.99.', { code: 'amount_too_large', param: 'amount' });
+  if (amount < SMALLEST_AMOUNT)
+    throw invalid('Amount must be at least 50 cents.', { code: 'amount_too_small', param: 'amount' });
+  if (amount > LARGEST_AMOUNT)
+    throw invalid('Amount must be no more than 999,999.99.', { code: 'amount_too_large', param: 'amount' });
 }
 
 function wrongState(intent: PaymentIntent, verb: string): PaymentFault {

@@ -20,9 +20,16 @@ export function createPaymentMethod(call: Call): PaymentMethod {
   const params = readParams(CreateParams, call.form);
   const number = params.card?.number ?? params.us_bank_account?.account_number;
   const known = number === undefined ? knownToken(params.card?.token) : testMethodOfNumber(number);
-  if (known === null) throw invalid('Your number is not one of the test numbers.', { code: 'incorrect_number', param: params.type });
+  if (known === null)
+    throw invalid('Your number is not one of the test numbers.', {
+      code: 'incorrect_number',
+      param: params.type,
+    });
   const method = makeMethod(call, known, null);
-  method.billing_details = { name: params.billing_details?.name ?? null, email: params.billing_details?.email ?? null };
+  method.billing_details = {
+    name: params.billing_details?.name ?? null,
+    email: params.billing_details?.email ?? null,
+  };
   method.metadata = params.metadata ?? {};
   return method;
 }
@@ -32,15 +39,22 @@ export function getPaymentMethod(call: Call): PaymentMethod {
 }
 
 export function attachPaymentMethod(call: Call): PaymentMethod {
-  const { customer } = readParams(z.strictObject({ customer: z.string(), expand: expand.optional() }), call.form);
+  const { customer } = readParams(
+    z.strictObject({ customer: z.string(), expand: expand.optional() }),
+    call.form,
+  );
   return methodForCustomer(call, call.id, customer);
 }
 
 export function detachPaymentMethod(call: Call): PaymentMethod {
   const method = getPaymentMethod(call);
-  if (method.customer === null) throw invalid('The payment method is not attached to a customer.', { code: 'payment_method_unexpected_state' });
+  if (method.customer === null)
+    throw invalid('The payment method is not attached to a customer.', {
+      code: 'payment_method_unexpected_state',
+    });
   const owner = call.state.customers[method.customer];
-  if (owner?.invoice_settings.default_payment_method === method.id) owner.invoice_settings.default_payment_method = null;
+  if (owner?.invoice_settings.default_payment_method === method.id)
+    owner.invoice_settings.default_payment_method = null;
   method.customer = null;
   emitEvent(call, 'payment_method.detached', method);
   return method;
@@ -60,10 +74,16 @@ export function listPaymentMethods(call: Call) {
 /** The saved method for a customer. A well-known test method is copied; one that belongs to somebody else is refused. */
 export function methodForCustomer(call: Call, methodId: string, customerId: string): PaymentMethod {
   mustFind(call.state.customers, customerId, 'customer', 'customer');
-  const method = methodId in TEST_METHODS ? makeMethod(call, methodId, null) : mustFind(call.state.paymentMethods, methodId, 'PaymentMethod', 'payment_method');
+  const method =
+    methodId in TEST_METHODS
+      ? makeMethod(call, methodId, null)
+      : mustFind(call.state.paymentMethods, methodId, 'PaymentMethod', 'payment_method');
   if (method.customer === customerId) return method;
   if (method.customer !== null) {
-    throw invalid('The payment method you provided has already been attached to a customer.', { code: 'payment_method_unexpected_state', param: 'payment_method' });
+    throw invalid('The payment method you provided has already been attached to a customer.', {
+      code: 'payment_method_unexpected_state',
+      param: 'payment_method',
+    });
   }
   method.customer = customerId;
   emitEvent(call, 'payment_method.attached', method);

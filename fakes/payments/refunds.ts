@@ -21,10 +21,15 @@ export function createRefund(call: Call): Refund {
   const params = readParams(CreateParams, call.form);
   const charge = chargeToRefund(call, params);
   const left = charge.amount - charge.amount_refunded;
-  if (left === 0) throw invalid(`Charge ${charge.id} has already been refunded.`, { code: 'charge_already_refunded' });
+  if (left === 0)
+    throw invalid(`Charge ${charge.id} has already been refunded.`, { code: 'charge_already_refunded' });
   const amount = params.amount ?? left;
-  if (amount < 1) throw invalid('Invalid positive integer', { code: 'parameter_invalid_integer', param: 'amount' });
-  if (amount > left) throw invalid(`Refund amount (${amount}) is greater than unrefunded amount on charge (${left})`, { param: 'amount' });
+  if (amount < 1)
+    throw invalid('Invalid positive integer', { code: 'parameter_invalid_integer', param: 'amount' });
+  if (amount > left)
+    throw invalid(`Refund amount (${amount}) is greater than unrefunded amount on charge (${left})`, {
+      param: 'amount',
+    });
 
   charge.amount_refunded += amount;
   charge.refunded = charge.amount_refunded === charge.amount;
@@ -54,23 +59,34 @@ export function getRefund(call: Call): Refund {
 
 export function listRefunds(call: Call) {
   const { payment_intent: intent } = call.form;
-  const own = Object.entries(call.state.refunds).filter(([, refund]) => intent === undefined || refund.payment_intent === intent);
+  const own = Object.entries(call.state.refunds).filter(
+    ([, refund]) => intent === undefined || refund.payment_intent === intent,
+  );
   return listOf(Object.fromEntries(own), call.form, '/v1/refunds');
 }
 
-function chargeToRefund(call: Call, { payment_intent: intentId, charge: chargeId }: { payment_intent?: string | undefined; charge?: string | undefined }): Charge {
+function chargeToRefund(
+  call: Call,
+  {
+    payment_intent: intentId,
+    charge: chargeId,
+  }: { payment_intent?: string | undefined; charge?: string | undefined },
+): Charge {
   if (intentId === undefined) return mustFind(call.state.charges, chargeId ?? '', 'charge', 'charge');
   const intent = mustFind(call.state.paymentIntents, intentId, 'payment_intent', 'payment_intent');
   const charge = call.state.charges[intent.latest_charge ?? ''];
   if (charge === undefined || charge.status !== 'succeeded') {
-    throw invalid(`This PaymentIntent (${intent.id}) does not have a successful charge to refund.`, { param: 'payment_intent' });
+    throw invalid(`This PaymentIntent (${intent.id}) does not have a successful charge to refund.`, {
+      param: 'payment_intent',
+    });
   }
   return charge;
 }
 
 function reverseTransfer(call: Call, charge: Charge, amount: number): string | null {
   const transfer = call.state.transfers[charge.transfer ?? ''];
-  if (transfer === undefined) throw invalid('The charge has no transfer to reverse.', { param: 'reverse_transfer' });
+  if (transfer === undefined)
+    throw invalid('The charge has no transfer to reverse.', { param: 'reverse_transfer' });
   transfer.amount_reversed = Math.min(transfer.amount, transfer.amount_reversed + amount);
   transfer.reversed = transfer.amount_reversed === transfer.amount;
   emitEvent(call, 'transfer.reversed', transfer);

@@ -23,7 +23,12 @@ export interface Account extends Resource {
   details_submitted: boolean;
   capabilities: Record<string, 'active' | 'inactive' | 'pending'>;
   requirements: { currently_due: string[]; past_due: string[]; disabled_reason: string | null };
-  external_accounts: { object: 'list'; data: { id: string; object: 'bank_account'; bank_name: string; last4: string }[]; has_more: false; url: string };
+  external_accounts: {
+    object: 'list';
+    data: { id: string; object: 'bank_account'; bank_name: string; last4: string }[];
+    has_more: false;
+    url: string;
+  };
 }
 
 export interface Customer extends Resource {

@@ -3,10 +3,29 @@ import { listOf, mustFind, seconds } from './call';
 import type { Call } from './call';
 import { createCustomer, getCustomer, listCustomers, updateCustomer } from './customers';
 import { invalid } from './payment-fault';
-import { cancelPaymentIntent, confirmPaymentIntent, createPaymentIntent, getPaymentIntent, listPaymentIntents } from './payment-intents';
-import { attachPaymentMethod, createPaymentMethod, detachPaymentMethod, getPaymentMethod, listPaymentMethods } from './payment-methods';
+import {
+  cancelPaymentIntent,
+  confirmPaymentIntent,
+  createPaymentIntent,
+  getPaymentIntent,
+  listPaymentIntents,
+} from './payment-intents';
+import {
+  attachPaymentMethod,
+  createPaymentMethod,
+  detachPaymentMethod,
+  getPaymentMethod,
+  listPaymentMethods,
+} from './payment-methods';
 import { createRefund, getRefund, listRefunds } from './refunds';
-import { confirmSetupIntent, createCheckoutSession, createSetupIntent, getCheckoutSession, getSetupIntent, listCheckoutSessions } from './setup-intents';
+import {
+  confirmSetupIntent,
+  createCheckoutSession,
+  createSetupIntent,
+  getCheckoutSession,
+  getSetupIntent,
+  listCheckoutSessions,
+} from './setup-intents';
 import { createTransfer, getTransfer, listTransfers } from './transfers';
 
 type Handler = (call: Call) => unknown;
@@ -78,9 +97,22 @@ export function routeOf(method: string, path: string): { handler: Handler; id: s
 }
 
 function ownAccount(call: Call) {
-  return { id: 'acct_1Fstandin', object: 'account', created: seconds(call), type: 'standard', country: 'US', charges_enabled: true, payouts_enabled: true };
+  return {
+    id: 'acct_1Fstandin',
+    object: 'account',
+    created: seconds(call),
+    type: 'standard',
+    country: 'US',
+    charges_enabled: true,
+    payouts_enabled: true,
+  };
 }
 
 function balance() {
-  return { object: 'balance', livemode: false, available: [{ amount: 0, currency: 'usd' }], pending: [{ amount: 0, currency: 'usd' }] };
+  return {
+    object: 'balance',
+    livemode: false,
+    available: [{ amount: 0, currency: 'usd' }],
+    pending: [{ amount: 0, currency: 'usd' }],
+  };
 }

@@ -18,7 +18,11 @@ interface ApiAnswer {
 }
 
 /** Answers a request under /v1 as the real service would. */
-export async function serveApi(world: PaymentsWorld, request: IncomingMessage, response: ServerResponse): Promise<void> {
+export async function serveApi(
+  world: PaymentsWorld,
+  request: IncomingMessage,
+  response: ServerResponse,
+): Promise<void> {
   const requestId = newPaymentId('req');
   const body = await readBody(request);
   // From here to the answer nothing is awaited: requests are handled one after the other, whole.
@@ -38,7 +42,10 @@ export async function serveApi(world: PaymentsWorld, request: IncomingMessage, r
   });
 }
 
-function answerOf(world: PaymentsWorld, { request, body, requestId }: { request: IncomingMessage; body: string; requestId: string }): ApiAnswer {
+function answerOf(
+  world: PaymentsWorld,
+  { request, body, requestId }: { request: IncomingMessage; body: string; requestId: string },
+): ApiAnswer {
   const { pathname, search } = new URL(request.url ?? '/', world.address());
   const method = request.method ?? 'GET';
   const key = method === 'POST' ? headerOf(request, 'idempotency-key') : null;
@@ -51,7 +58,13 @@ function answerOf(world: PaymentsWorld, { request, body, requestId }: { request:
 
     const { handler, id } = routeOf(method, pathname);
     const form = parseForm(method === 'GET' ? search.slice(1) : body);
-    const call: Call = world.call({ id, form, requestId, idempotencyKey: key, apiVersion: headerOf(request, 'stripe-version') });
+    const call: Call = world.call({
+      id,
+      form,
+      requestId,
+      idempotencyKey: key,
+      apiVersion: headerOf(request, 'stripe-version'),
+    });
     const answer = run(() => expandFields(world.store.state, handler(call), expandOf(form['expand'])));
     if (keyed !== null) keepAnswer(world.store.state, keyed, { ...answer, nowMs: world.now() });
     if (method !== 'GET') world.changed();
@@ -78,7 +91,9 @@ function faultAnswer(error: unknown): ApiAnswer {
 
 function mustBeSignedIn(request: IncomingMessage): void {
   const given = request.headers.authorization ?? '';
-  const key = given.startsWith('Basic ') ? Buffer.from(given.slice(6), 'base64').toString().split(':')[0] : given.replace(/^Bearer /, '');
+  const key = given.startsWith('Basic ')
+    ? Buffer.from(given.slice(6), 'base64').toString().split(':')[0]
+    : given.replace(/^Bearer /, '');
   if (key?.startsWith('sk_') !== true) {
     throw new PaymentFault(401, { type: 'invalid_request_error', message: 'Invalid API Key provided.' });
   }

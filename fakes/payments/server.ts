@@ -44,7 +44,9 @@ export async function startPaymentsServer(options: PaymentsServerOptions): Promi
     (request, response) => {
       serve(world, request, response).catch((error: unknown) => {
         if (response.headersSent) return response.destroy();
-        answerJson(response, 500, { error: { type: 'api_error', message: error instanceof Error ? error.message : String(error) } });
+        answerJson(response, 500, {
+          error: { type: 'api_error', message: error instanceof Error ? error.message : String(error) },
+        });
       });
     },
     { port, host },
@@ -62,7 +64,11 @@ export async function startPaymentsServer(options: PaymentsServerOptions): Promi
   };
 }
 
-async function serve(world: PaymentsWorld, request: IncomingMessage, response: ServerResponse): Promise<void> {
+async function serve(
+  world: PaymentsWorld,
+  request: IncomingMessage,
+  response: ServerResponse,
+): Promise<void> {
   const { pathname } = new URL(request.url ?? '/', world.address());
   const [section = '', id = ''] = pathname.split('/').slice(1);
   if (section === 'health') return answerJson(response, 200, { ok: true, failure: world.failure() });
@@ -72,13 +78,17 @@ async function serve(world: PaymentsWorld, request: IncomingMessage, response: S
   if (section === 'checkout') return serveCheckout(world, id, { request, response });
   if (world.failure() === 'drop') return void request.socket.destroy();
   if (world.failure() === 'refuse') {
-    return answerJson(response, 503, { error: { type: 'api_error', message: 'The payment service is not available.' } });
+    return answerJson(response, 503, {
+      error: { type: 'api_error', message: 'The payment service is not available.' },
+    });
   }
   return serveApi(world, request, response);
 }
 
 function beat(world: PaymentsWorld): void {
-  const ended = settleDue(world.call({ id: '', form: {}, requestId: null, idempotencyKey: null, apiVersion: null }));
+  const ended = settleDue(
+    world.call({ id: '', form: {}, requestId: null, idempotencyKey: null, apiVersion: null }),
+  );
   if (ended.length > 0) world.store.save();
   if (!world.isHoldingWebhooks()) void world.webhooks.sendDue();
 }

@@ -50,7 +50,10 @@ export function startProcessing(call: Call, intent: PaymentIntent, outcome: 'suc
 }
 
 /** Ends payments under way: those that are due, or exactly the one asked for. Says how many it ended. */
-export function settleDue(call: Call, asked?: { intent?: string | undefined; outcome?: 'succeed' | 'fail' | undefined }): string[] {
+export function settleDue(
+  call: Call,
+  asked?: { intent?: string | undefined; outcome?: 'succeed' | 'fail' | undefined },
+): string[] {
   const due = Object.entries(call.state.settlements).filter(([id, { atMs }]) =>
     asked === undefined ? atMs <= call.nowMs : asked.intent === undefined || asked.intent === id,
   );

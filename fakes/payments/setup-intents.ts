@@ -13,7 +13,9 @@ const SetupParams = z.strictObject({
   customer: z.string().optional(),
   payment_method: z.string().optional(),
   payment_method_types: z.array(z.string()).optional(),
-  automatic_payment_methods: z.strictObject({ enabled: flag, allow_redirects: z.string().optional() }).optional(),
+  automatic_payment_methods: z
+    .strictObject({ enabled: flag, allow_redirects: z.string().optional() })
+    .optional(),
   usage: z.string().optional(),
   confirm: flag.optional(),
   metadata: metadata.optional(),
@@ -36,7 +38,14 @@ export function getSetupIntent(call: Call): SetupIntent {
 }
 
 export function confirmSetupIntent(call: Call): SetupIntent {
-  const params = readParams(z.strictObject({ payment_method: z.string().optional(), return_url: z.string().optional(), expand: expand.optional() }), call.form);
+  const params = readParams(
+    z.strictObject({
+      payment_method: z.string().optional(),
+      return_url: z.string().optional(),
+      expand: expand.optional(),
+    }),
+    call.form,
+  );
   return succeedSetup(call, getSetupIntent(call), params.payment_method);
 }
 
@@ -87,7 +96,8 @@ export function listCheckoutSessions(call: Call) {
 
 /** What the hosted page does when its form is sent. */
 export function completeCheckout(call: Call, session: CheckoutSession, methodId: string): void {
-  if (session.status !== 'open') throw invalid('This page has been used.', { code: 'resource_already_complete' });
+  if (session.status !== 'open')
+    throw invalid('This page has been used.', { code: 'resource_already_complete' });
   const intent = mustFind(call.state.setupIntents, session.setup_intent, 'setupintent');
   succeedSetup(call, intent, methodId);
   session.status = 'complete';
@@ -98,9 +108,12 @@ export function completeCheckout(call: Call, session: CheckoutSession, methodId:
 function succeedSetup(call: Call, intent: SetupIntent, given: string | undefined): SetupIntent {
   const methodId = given ?? intent.payment_method;
   if (intent.status === 'succeeded' || intent.status === 'canceled' || methodId === null) {
-    throw invalid(`You cannot confirm this SetupIntent because it has a status of ${intent.status}.`, { code: 'setup_intent_unexpected_state' });
+    throw invalid(`You cannot confirm this SetupIntent because it has a status of ${intent.status}.`, {
+      code: 'setup_intent_unexpected_state',
+    });
   }
-  intent.payment_method = intent.customer === null ? methodId : methodForCustomer(call, methodId, intent.customer).id;
+  intent.payment_method =
+    intent.customer === null ? methodId : methodForCustomer(call, methodId, intent.customer).id;
   intent.status = 'succeeded';
   emitEvent(call, 'setup_intent.succeeded', intent);
   return intent;

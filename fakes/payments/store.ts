@@ -1,6 +1,17 @@
 import { mkdirSync, readFileSync, renameSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
-import type { Account, Charge, CheckoutSession, Customer, PaymentEvent, PaymentIntent, PaymentMethod, Refund, SetupIntent, Transfer } from './resources';
+import type {
+  Account,
+  Charge,
+  CheckoutSession,
+  Customer,
+  PaymentEvent,
+  PaymentIntent,
+  PaymentMethod,
+  Refund,
+  SetupIntent,
+  Transfer,
+} from './resources';
 
 /** What a saved method does when it is charged; the public object does not show it, as a real card does not either. */
 export interface Behaviour {
@@ -80,7 +91,9 @@ function readState(file: string): Partial<PaymentsState> {
     return JSON.parse(readFileSync(file, 'utf8')) as Partial<PaymentsState>;
   } catch (error) {
     if (error instanceof Error && 'code' in error && error.code === 'ENOENT') return {};
-    throw new Error(`${file} is not readable as payments state: ${error instanceof Error ? error.message : String(error)}`);
+    throw new Error(
+      `${file} is not readable as payments state: ${error instanceof Error ? error.message : String(error)}`,
+    );
   }
 }
 

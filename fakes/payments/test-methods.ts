@@ -13,9 +13,18 @@ const card = (brand: string, last4: string): TestMethod['method'] => ({
 });
 const bank = (last4: string): TestMethod['method'] => ({
   type: 'us_bank_account',
-  us_bank_account: { bank_name: 'Test Bank', last4, account_holder_type: 'company', account_type: 'checking' },
+  us_bank_account: {
+    bank_name: 'Test Bank',
+    last4,
+    account_holder_type: 'company',
+    account_type: 'checking',
+  },
 });
-const declined = (code: string, declineCode: string): Behaviour => ({ outcome: 'decline', code, declineCode });
+const declined = (code: string, declineCode: string): Behaviour => ({
+  outcome: 'decline',
+  code,
+  declineCode,
+});
 
 /**
  * Methods that behave as told, under the names the real service's test mode gives them.
@@ -24,20 +33,36 @@ const declined = (code: string, declineCode: string): Behaviour => ({ outcome: '
  * `processing` first and succeeds or fails later, as in life.
  */
 export const TEST_METHODS: Readonly<Record<string, TestMethod>> = {
-  pm_usBankAccount_success: { label: 'Bank account, pays after a while', method: bank('6789'), behaviour: { outcome: 'succeed_later' } },
-  pm_card_visa: { label: 'Card, pays at once', method: card('visa', '4242'), behaviour: { outcome: 'succeed' } },
+  pm_usBankAccount_success: {
+    label: 'Bank account, pays after a while',
+    method: bank('6789'),
+    behaviour: { outcome: 'succeed_later' },
+  },
+  pm_card_visa: {
+    label: 'Card, pays at once',
+    method: card('visa', '4242'),
+    behaviour: { outcome: 'succeed' },
+  },
   pm_usBankAccount_accountClosed: {
     label: 'Bank account that turns out to be closed',
     method: bank('1116'),
     behaviour: { outcome: 'fail_later', code: 'payment_method_customer_decline' },
   },
-  pm_card_chargeDeclined: { label: 'Card that is declined', method: card('visa', '0002'), behaviour: declined('card_declined', 'generic_decline') },
+  pm_card_chargeDeclined: {
+    label: 'Card that is declined',
+    method: card('visa', '0002'),
+    behaviour: declined('card_declined', 'generic_decline'),
+  },
   pm_card_chargeDeclinedInsufficientFunds: {
     label: 'Card without enough money',
     method: card('visa', '9995'),
     behaviour: declined('card_declined', 'insufficient_funds'),
   },
-  pm_card_chargeDeclinedExpiredCard: { label: 'Card that has expired', method: card('visa', '0069'), behaviour: declined('expired_card', 'expired_card') },
+  pm_card_chargeDeclinedExpiredCard: {
+    label: 'Card that has expired',
+    method: card('visa', '0069'),
+    behaviour: declined('expired_card', 'expired_card'),
+  },
   pm_card_authenticationRequired: {
     label: 'Card whose bank wants to ask its owner',
     method: card('visa', '3155'),

@@ -46,6 +46,8 @@ export function getTransfer(call: Call): Transfer {
 
 export function listTransfers(call: Call) {
   const { destination } = call.form;
-  const own = Object.entries(call.state.transfers).filter(([, transfer]) => destination === undefined || transfer.destination === destination);
+  const own = Object.entries(call.state.transfers).filter(
+    ([, transfer]) => destination === undefined || transfer.destination === destination,
+  );
   return listOf(Object.fromEntries(own), call.form, '/v1/transfers');
 }

@@ -43,7 +43,9 @@ export function webhooksTo({ url, secret, now }: WebhookOptions, store: Payments
       if (isSending) return;
       isSending = true;
       try {
-        const due = store.state.deliveries.filter(({ state, nextAtMs }) => state === 'waiting' && nextAtMs <= now());
+        const due = store.state.deliveries.filter(
+          ({ state, nextAtMs }) => state === 'waiting' && nextAtMs <= now(),
+        );
         for (const delivery of due) await deliver(delivery);
       } finally {
         isSending = false;
@@ -61,12 +63,20 @@ export function webhooksTo({ url, secret, now }: WebhookOptions, store: Payments
       const event = store.state.events[eventId];
       if (event === undefined) return 'no such event';
       const body = JSON.stringify(event, null, 2);
-      return post(url, how === 'tampered' ? body.replace('"livemode": false', '"livemode":  false') : body, forgedSignature(body, secret, { how, nowMs: now() }));
+      return post(
+        url,
+        how === 'tampered' ? body.replace('"livemode": false', '"livemode":  false') : body,
+        forgedSignature(body, secret, { how, nowMs: now() }),
+      );
     },
   };
 }
 
-function forgedSignature(body: string, secret: string, { how, nowMs }: { how: Forgery; nowMs: number }): string | null {
+function forgedSignature(
+  body: string,
+  secret: string,
+  { how, nowMs }: { how: Forgery; nowMs: number },
+): string | null {
   const atSeconds = Math.floor(nowMs / 1000);
   switch (how) {
     case 'wrong_secret':
@@ -97,7 +107,10 @@ async function post(url: string, body: string, signature: string | null): Promis
     const response = await fetch(url, {
       method: 'POST',
       redirect: 'manual',
-      headers: { 'content-type': 'application/json; charset=utf-8', ...(signature === null ? {} : { 'stripe-signature': signature }) },
+      headers: {
+        'content-type': 'application/json; charset=utf-8',
+        ...(signature === null ? {} : { 'stripe-signature': signature }),
+      },
       body,
       signal: AbortSignal.timeout(TIMEOUT_MS),
     });

@@ -14,7 +14,9 @@ export interface PaymentsWorld {
   webhooks: Webhooks;
   now(): number;
   address(): string;
-  call(request: Pick<Call, 'id' | 'form' | 'requestId' | 'idempotencyKey'> & { apiVersion: string | null }): Call;
+  call(
+    request: Pick<Call, 'id' | 'form' | 'requestId' | 'idempotencyKey'> & { apiVersion: string | null },
+  ): Call;
   /** Writes the state and lets the webhooks go. */
   changed(): void;
   failure(): PaymentFailure;

@@ -57,20 +57,27 @@ export async function startStorageServer(options: StorageServerOptions): Promise
   const serveS3 = s3.callback();
   let failure: Failure = 'none';
 
-  const listening = await listen((request, response) => {
-    const { pathname, searchParams } = new URL(request.url ?? '/', 'http://storage.local');
-    if (pathname === '/health') return answerJson(response, 200, { ok: true, failure });
-    if (pathname === '/control' && request.method === 'POST') {
-      return void setFailure(request, response, (mode) => (failure = mode));
-    }
-    if (failure === 'drop') return void request.socket.destroy();
-    if (failure === 'cut' && request.method === 'PUT') return void request.once('data', () => request.socket.destroy());
-    if (failure === 'refuse') return answerError(response, new S3Error('SlowDown', 'Reduce your request rate.'));
-    if (isAnonymous(request, searchParams)) return answerError(response, new S3Error('AccessDenied', 'Access Denied'));
+  const listening = await listen(
+    (request, response) => {
+      const { pathname, searchParams } = new URL(request.url ?? '/', 'http://storage.local');
+      if (pathname === '/health') return answerJson(response, 200, { ok: true, failure });
+      if (pathname === '/control' && request.method === 'POST') {
+        return void setFailure(request, response, (mode) => (failure = mode));
+      }
+      if (failure === 'drop') return void request.socket.destroy();
+      if (failure === 'cut' && request.method === 'PUT')
+        return void request.once('data', () => request.socket.destroy());
+      if (failure === 'refuse')
+        return answerError(response, new S3Error('SlowDown', 'Reduce your request rate.'));
+      if (isAnonymous(request, searchParams))
+        return answerError(response, new S3Error('AccessDenied', 'Access Denied'));
 
-    const sha256 = headerOf(request, 'x-amz-checksum-sha256') ?? searchParams.get('x-amz-checksum-sha256') ?? undefined;
-    expected.run({ sha256 }, () => serveS3(request, response));
-  }, { port, host });
+      const sha256 =
+        headerOf(request, 'x-amz-checksum-sha256') ?? searchParams.get('x-amz-checksum-sha256') ?? undefined;
+      expected.run({ sha256 }, () => serveS3(request, response));
+    },
+    { port, host },
+  );
 
   return { address: `http://${host}:${listening.port}`, port: listening.port, close: listening.close };
 }
@@ -90,7 +97,11 @@ function answerError(response: ServerResponse, error: S3Error): void {
   answerWith(response, { status: error.status, type: 'application/xml', body: error.toXML() });
 }
 
-async function setFailure(request: IncomingMessage, response: ServerResponse, set: (mode: Failure) => void): Promise<void> {
+async function setFailure(
+  request: IncomingMessage,
+  response: ServerResponse,
+  set: (mode: Failure) => void,
+): Promise<void> {
   try {
     const failure = chosenMode(await readBody(request), 'fail', FAILURES);
     set(failure);
@@ -108,7 +119,9 @@ function corsConfiguration(origins: readonly string[]): string {
 /** The web server's own addresses for start and tests, and the one it was told to have. */
 function originsFromEnv(): string[] {
   const told = process.env['APP_URL'];
-  return [...new Set(['http://localhost:4600', 'http://localhost:5600', ...(told ? [new URL(told).origin] : [])])];
+  return [
+    ...new Set(['http://localhost:4600', 'http://localhost:5600', ...(told ? [new URL(told).origin] : [])]),
+  ];
 }
 
 if (isProgram(import.meta.url)) {

@@ -25,4 +25,28 @@ import * as tideline from '@/lib/tideline/endpoints';
 import type { Endpoint } from './endpoint';
 
 /** Every read and write there is: what the documentation and the walk over all permissions go by. */
-export const ALL_ENDPOINTS: readonly Endpoint[] = [assemblies, audit, batchLinks, batches, certificates, dossiers, files, invoices, jobs, lots, messages, nonconformances, organisations, parts, payments, people, portal, processors, receipts, search, session, stock, tideline].flatMap((domain) => Object.values(domain) as unknown as Endpoint[]);
+export const ALL_ENDPOINTS: readonly Endpoint[] = [
+  assemblies,
+  audit,
+  batchLinks,
+  batches,
+  certificates,
+  dossiers,
+  files,
+  invoices,
+  jobs,
+  lots,
+  messages,
+  nonconformances,
+  organisations,
+  parts,
+  payments,
+  people,
+  portal,
+  processors,
+  receipts,
+  search,
+  session,
+  stock,
+  tideline,
+].flatMap((domain) => Object.values(domain) as unknown as Endpoint[]);

@@ -9,10 +9,19 @@ export class ApiError extends Error {
   }
 }
 
-const OFFLINE: Problem = { type: 'about:blank', title: 'No answer from Lotwright. What you typed is kept here; try again when the network is back.', status: 0, code: 'no_network', requestId: '' };
+const OFFLINE: Problem = {
+  type: 'about:blank',
+  title: 'No answer from Lotwright. What you typed is kept here; try again when the network is back.',
+  status: 0,
+  code: 'no_network',
+  requestId: '',
+};
 
 /** Path and query of a call, or path and body: parameters in braces are taken out of the input. */
-export function requestOf(declaration: Declaration, input: Record<string, unknown>): { url: string; body: string | undefined } {
+export function requestOf(
+  declaration: Declaration,
+  input: Record<string, unknown>,
+): { url: string; body: string | undefined } {
   const rest = { ...input };
   const path = declaration.path.replace(/\{(\w+)\}/g, (_, name: string) => {
     const value = String(rest[name]);
@@ -35,13 +44,20 @@ export function requestOf(declaration: Declaration, input: Record<string, unknow
  *
  * @throws ApiError with the server's own sentence, or `no_network`.
  */
-export async function call<D extends Declaration>(declaration: D, input: InputOf<D>, options: { key?: string; signal?: AbortSignal } = {}): Promise<OutputOf<D>> {
+export async function call<D extends Declaration>(
+  declaration: D,
+  input: InputOf<D>,
+  options: { key?: string; signal?: AbortSignal } = {},
+): Promise<OutputOf<D>> {
   const { url, body } = requestOf(declaration, input as Record<string, unknown>);
   let response: Response;
   try {
     response = await fetch(url, {
       method: declaration.method.toUpperCase(),
-      headers: { ...(body === undefined ? {} : { 'content-type': 'application/json' }), ...(options.key === undefined ? {} : { 'idempotency-key': options.key }) },
+      headers: {
+        ...(body === undefined ? {} : { 'content-type': 'application/json' }),
+        ...(options.key === undefined ? {} : { 'idempotency-key': options.key }),
+      },
       ...(body === undefined ? {} : { body }),
       ...(options.signal ? { signal: options.signal } : {}),
     });
@@ -55,5 +71,12 @@ export async function call<D extends Declaration>(declaration: D, input: InputOf
 
 async function problemOf(response: Response): Promise<Problem> {
   const parsed = Problem.safeParse(await response.json().catch(() => null));
-  return parsed.success ? parsed.data : { ...OFFLINE, status: response.status, title: 'Lotwright could not answer this. Try again in a moment.', code: 'unavailable' };
+  return parsed.success
+    ? parsed.data
+    : {
+        ...OFFLINE,
+        status: response.status,
+        title: 'Lotwright could not answer this. Try again in a moment.',
+        code: 'unavailable',
+      };
 }

@@ -12,7 +12,10 @@ export type Side = 'shop' | 'portal' | 'any' | 'public';
  * One read or write as the world sees it. Holds no server code, so the browser makes its typed calls, the route its
  * validation and the documentation its text from the same object.
  */
-export interface Declaration<Input extends z.ZodObject = z.ZodObject, Response extends z.ZodType = z.ZodType> {
+export interface Declaration<
+  Input extends z.ZodObject = z.ZodObject,
+  Response extends z.ZodType = z.ZodType,
+> {
   /** Name of the operation, unique: `dispatchBatch`. */
   id: string;
   method: Method;
@@ -30,7 +33,9 @@ export interface Declaration<Input extends z.ZodObject = z.ZodObject, Response e
 export type InputOf<D extends Declaration> = z.input<D['input']>;
 export type OutputOf<D extends Declaration> = z.output<D['response']>;
 
-export function declare<Input extends z.ZodObject, Response extends z.ZodType>(given: Declaration<Input, Response>): Declaration<Input, Response> {
+export function declare<Input extends z.ZodObject, Response extends z.ZodType>(
+  given: Declaration<Input, Response>,
+): Declaration<Input, Response> {
   return given;
 }
 

@@ -59,7 +59,8 @@ interface Schema {
   default?: unknown;
 }
 
-const schemaOf = (schema: z.ZodType, io: 'input' | 'output'): Schema => z.toJSONSchema(schema, { io, unrepresentable: 'any', target: 'draft-2020-12' }) as Schema;
+const schemaOf = (schema: z.ZodType, io: 'input' | 'output'): Schema =>
+  z.toJSONSchema(schema, { io, unrepresentable: 'any', target: 'draft-2020-12' }) as Schema;
 
 const DEEPEST = 3;
 
@@ -68,7 +69,12 @@ function fieldsOf(schema: Schema, prefix = '', depth = 0): ReadableField[] {
   const { properties = {}, required = [] } = schema;
   return Object.entries(properties).flatMap(([name, property]) => {
     const inner = property.type === 'array' ? (property.items ?? {}) : property;
-    const own: ReadableField = { name: prefix + name, kind: kindOf(property), required: required.includes(name), limits: limitsOf(property) };
+    const own: ReadableField = {
+      name: prefix + name,
+      kind: kindOf(property),
+      required: required.includes(name),
+      limits: limitsOf(property),
+    };
     if (depth >= DEEPEST || !inner.properties) return [own];
     return [own, ...fieldsOf(inner, `${prefix}${name}${property.type === 'array' ? '[]' : ''}.`, depth + 1)];
   });
@@ -87,7 +93,8 @@ function kindOf(schema: Schema): string {
 function limitsOf(schema: Schema): string {
   const says: string[] = [];
   const range = (least: number | undefined, most: number | undefined, what: string) => {
-    const isLimit = (limit: number | undefined) => limit !== undefined && Math.abs(limit) < Number.MAX_SAFE_INTEGER;
+    const isLimit = (limit: number | undefined) =>
+      limit !== undefined && Math.abs(limit) < Number.MAX_SAFE_INTEGER;
     if (isLimit(least)) says.push(`at least ${least}${what}`);
     if (isLimit(most)) says.push(`at most ${most}${what}`);
   };

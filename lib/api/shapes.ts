@@ -12,7 +12,10 @@ export const Day = z.iso.date('Enter a day, as 2026-04-16.');
 export const Id = z.uuid();
 
 /** A count of pieces a person enters: a whole number, 1 or more. */
-export const Pieces = z.int('Enter a whole number of pieces.').min(1, 'Enter 1 or more.').max(1_000_000, 'Enter 1,000,000 or less.');
+export const Pieces = z
+  .int('Enter a whole number of pieces.')
+  .min(1, 'Enter 1 or more.')
+  .max(1_000_000, 'Enter 1,000,000 or less.');
 
 /** A file or another format that is not JSON. */
 export const BINARY = z.any().meta({ description: 'binary' });
@@ -24,7 +27,8 @@ export const PageQuery = z.object({
 });
 
 /** One page of a list; `next` is the key to ask for the following one with, null on the last. */
-export const pageOf = <Row extends z.ZodType>(row: Row) => z.object({ rows: z.array(row), next: z.string().nullable() });
+export const pageOf = <Row extends z.ZodType>(row: Row) =>
+  z.object({ rows: z.array(row), next: z.string().nullable() });
 
 /** A write that has nothing to tell but that it was done. */
 export const Done = z.object({ done: z.literal(true) });

@@ -5,14 +5,22 @@ import { Day, Done, Id, Moment, Pieces } from '@/lib/api/shapes';
 import { STAGES } from '@/lib/batches/stage';
 import { PROCESSES } from '@/lib/trade/process';
 
-const Need = z.object({ partNumber: z.string().trim().min(1, 'Enter the part number.').max(80), pieces: Pieces });
+const Need = z.object({
+  partNumber: z.string().trim().min(1, 'Enter the part number.').max(80),
+  pieces: Pieces,
+});
 
 const Needs = z
   .array(Need)
   .max(500)
   .superRefine((needs, issues) => {
     needs.forEach((need, at) => {
-      if (needs.findIndex((other) => other.partNumber === need.partNumber) < at) issues.addIssue({ code: 'custom', path: [at, 'partNumber'], message: 'This part is in the list already. Change its pieces there.' });
+      if (needs.findIndex((other) => other.partNumber === need.partNumber) < at)
+        issues.addIssue({
+          code: 'custom',
+          path: [at, 'partNumber'],
+          message: 'This part is in the list already. Change its pieces there.',
+        });
     });
   });
 
@@ -39,7 +47,15 @@ export const Wait = z.object({
 });
 export type Wait = z.output<typeof Wait>;
 
-export const AssemblyRow = z.object({ id: Id, name: z.string(), neededOn: z.string().nullable(), needed: z.int(), ready: z.int(), closedAt: Moment.nullable(), batches: z.array(Wait) });
+export const AssemblyRow = z.object({
+  id: Id,
+  name: z.string(),
+  neededOn: z.string().nullable(),
+  needed: z.int(),
+  ready: z.int(),
+  closedAt: Moment.nullable(),
+  batches: z.array(Wait),
+});
 export type AssemblyRow = z.output<typeof AssemblyRow>;
 
 export const listAssemblies = declare({
@@ -62,12 +78,21 @@ export const AssemblyNeedRow = z.object({
   /** In stock and counted for this assembly alone. */
   inStock: z.int(),
   /** Lots in stock that could be issued now. */
-  stock: z.array(z.object({ lotId: Id, lotNumber: z.string(), locationId: Id, location: z.string(), pieces: z.int() })),
+  stock: z.array(
+    z.object({ lotId: Id, lotNumber: z.string(), locationId: Id, location: z.string(), pieces: z.int() }),
+  ),
   batches: z.array(Wait),
   /** In the yard, not on any batch, by the outside step they wait for. */
   waiting: z.array(z.object({ process: z.enum(PROCESSES), pieces: z.int() })),
   /** Which lots went into it. */
-  fittedLots: z.array(z.object({ lotId: Id, lotNumber: z.string(), pieces: z.int(), named: z.array(z.object({ id: Id, serial: z.string() })) })),
+  fittedLots: z.array(
+    z.object({
+      lotId: Id,
+      lotNumber: z.string(),
+      pieces: z.int(),
+      named: z.array(z.object({ id: Id, serial: z.string() })),
+    }),
+  ),
 });
 export type AssemblyNeedRow = z.output<typeof AssemblyNeedRow>;
 
@@ -79,7 +104,16 @@ export const getAssembly = declare({
   side: 'shop',
   permission: 'assembly.read',
   input: z.object({ assemblyId: Id }),
-  response: z.object({ id: Id, name: z.string(), neededOn: z.string().nullable(), note: z.string().nullable(), closed: z.boolean(), version: z.int(), today: z.string(), needs: z.array(AssemblyNeedRow) }),
+  response: z.object({
+    id: Id,
+    name: z.string(),
+    neededOn: z.string().nullable(),
+    note: z.string().nullable(),
+    closed: z.boolean(),
+    version: z.int(),
+    today: z.string(),
+    needs: z.array(AssemblyNeedRow),
+  }),
 });
 
 export const createAssembly = declare({

@@ -24,9 +24,17 @@ async function readOpen(ctx: Ctx): Promise<AssemblyRow[]> {
   const without = await ctx.tx
     .select({ id: assemblies.id, name: assemblies.name, neededOn: assemblies.neededOn })
     .from(assemblies)
-    .where(and(isNull(assemblies.closedAt), sql`not exists (select 1 from assembly_needs n where n.assembly_id = ${assemblies.id})`))
+    .where(
+      and(
+        isNull(assemblies.closedAt),
+        sql`not exists (select 1 from assembly_needs n where n.assembly_id = ${assemblies.id})`,
+      ),
+    )
     .orderBy(assemblies.name);
-  return [...ready.map((row) => ({ ...row, closedAt: null })), ...without.map((row) => ({ ...row, needed: 0, ready: 0, closedAt: null, batches: [] }))];
+  return [
+    ...ready.map((row) => ({ ...row, closedAt: null })),
+    ...without.map((row) => ({ ...row, needed: 0, ready: 0, closedAt: null, batches: [] })),
+  ];
 }
 
 /** Nothing in stock is counted for a closed one: what it has is what was fitted. */
@@ -44,26 +52,48 @@ async function readClosed(ctx: Ctx): Promise<AssemblyRow[]> {
     .where(isNotNull(assemblies.closedAt))
     .orderBy(desc(assemblies.closedAt), desc(assemblies.id))
     .limit(MOST_CLOSED);
-  return rows.map(({ closedAt, ...row }) => ({ ...row, closedAt: closedAt?.toISOString() ?? null, batches: [] }));
+  return rows.map(({ closedAt, ...row }) => ({
+    ...row,
+    closedAt: closedAt?.toISOString() ?? null,
+    batches: [],
+  }));
 }
 
 export async function getAssembly(ctx: Ctx, { assemblyId }: { assemblyId: string }) {
   authorize(ctx, 'assembly.read');
   const [assembly] = await ctx.tx
-    .select({ id: assemblies.id, name: assemblies.name, neededOn: assemblies.neededOn, note: assemblies.note, closedAt: assemblies.closedAt, version: assemblies.version })
+    .select({
+      id: assemblies.id,
+      name: assemblies.name,
+      neededOn: assemblies.neededOn,
+      note: assemblies.note,
+      closedAt: assemblies.closedAt,
+      version: assemblies.version,
+    })
     .from(assemblies)
     .where(eq(assemblies.id, assemblyId));
   if (!assembly) throw notFound('assembly');
   const { closedAt, ...rest } = assembly;
-  return { ...rest, closed: closedAt !== null, today: await todayOf(ctx), needs: await readNeedRows(ctx, assemblyId) };
+  return {
+    ...rest,
+    closed: closedAt !== null,
+    today: await todayOf(ctx),
+    needs: await readNeedRows(ctx, assemblyId),
+  };
 }
 
 async function todayOf(ctx: Ctx): Promise<string> {
-  const [shop] = await ctx.tx.select({ zone: shops.zone }).from(shops).where(eq(shops.id, shopOf(ctx)));
+  const [shop] = await ctx.tx
+    .select({ zone: shops.zone })
+    .from(shops)
+    .where(eq(shops.id, shopOf(ctx)));
   return calendarDay(ctx.now, shop?.zone ?? 'UTC');
 }
 
-type Known = Pick<AssemblyNeedRow, 'partNumber' | 'partId' | 'partName' | 'pieces' | 'fitted' | 'stock' | 'waiting' | 'fittedLots'>;
+type Known = Pick<
+  AssemblyNeedRow,
+  'partNumber' | 'partId' | 'partName' | 'pieces' | 'fitted' | 'stock' | 'waiting' | 'fittedLots'
+>;
 
 async function readNeedRows(ctx: Ctx, assemblyId: string): Promise<AssemblyNeedRow[]> {
   const all = await readNeeds(ctx);

@@ -37,11 +37,22 @@ export async function readReadiness(ctx: Pick<Ctx, 'tx'>): Promise<Readiness[]> 
   const waits = await readWaits(ctx);
   const byAssembly = new Map<string, Readiness>();
   needs.forEach((need, at) => {
-    const row = byAssembly.get(need.assemblyId) ?? { id: need.assemblyId, name: need.name, neededOn: need.neededOn, needed: 0, ready: 0, batches: [] };
+    const row = byAssembly.get(need.assemblyId) ?? {
+      id: need.assemblyId,
+      name: need.name,
+      neededOn: need.neededOn,
+      needed: 0,
+      ready: 0,
+      batches: [],
+    };
     row.needed += need.pieces;
     row.ready += ready[at] ?? 0;
     // A part that is ready waits for no batch, even if more of it is under way.
-    if ((ready[at] ?? 0) < need.pieces) addWaits(row, waits.filter((wait) => wait.partNumber === need.partNumber));
+    if ((ready[at] ?? 0) < need.pieces)
+      addWaits(
+        row,
+        waits.filter((wait) => wait.partNumber === need.partNumber),
+      );
     byAssembly.set(need.assemblyId, row);
   });
   return [...byAssembly.values()];
@@ -51,8 +62,22 @@ export async function readReadiness(ctx: Pick<Ctx, 'tx'>): Promise<Readiness[]> 
 function addWaits(row: Readiness, waits: readonly BatchWait[]): void {
   for (const { id, number, stage, processor, promisedOn, ...counts } of waits) {
     const known = row.batches.find((one) => one.id === id);
-    if (!known) row.batches.push({ id, number, stage, processor, promisedOn, pieces: counts.pieces, packed: counts.packed, away: counts.away, back: counts.back, held: counts.held });
-    else for (const count of ['pieces', 'packed', 'away', 'back', 'held'] as const) known[count] += counts[count];
+    if (!known)
+      row.batches.push({
+        id,
+        number,
+        stage,
+        processor,
+        promisedOn,
+        pieces: counts.pieces,
+        packed: counts.packed,
+        away: counts.away,
+        back: counts.back,
+        held: counts.held,
+      });
+    else
+      for (const count of ['pieces', 'packed', 'away', 'back', 'held'] as const)
+        known[count] += counts[count];
   }
 }
 

@@ -48,5 +48,9 @@ export const listAuditFilters = declare({
   side: 'shop',
   permission: 'audit.read',
   input: z.object({}),
-  response: z.object({ zone: z.string(), people: z.array(z.object({ id: Id, name: z.string() })), entities: z.array(z.string()) }),
+  response: z.object({
+    zone: z.string(),
+    people: z.array(z.object({ id: Id, name: z.string() })),
+    entities: z.array(z.string()),
+  }),
 });

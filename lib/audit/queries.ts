@@ -40,8 +40,12 @@ export async function listAudit(ctx: Ctx, asked: Asked) {
 
 function conditions(ctx: Ctx, { after, entity, entityId, personId, from, to }: Asked): (SQL | undefined)[] {
   const key = after === undefined ? null : Number(after);
-  if (key !== null && !Number.isSafeInteger(key)) throw new AppError('bad_input', 'This is not a place in the list.', { fields: [{ field: 'after', message: 'Use what `next` said.' }] });
-  const startOf = (day: string) => sql`(${day}::date::timestamp at time zone (select zone from shops where id = ${shopOf(ctx)}))`;
+  if (key !== null && !Number.isSafeInteger(key))
+    throw new AppError('bad_input', 'This is not a place in the list.', {
+      fields: [{ field: 'after', message: 'Use what `next` said.' }],
+    });
+  const startOf = (day: string) =>
+    sql`(${day}::date::timestamp at time zone (select zone from shops where id = ${shopOf(ctx)}))`;
   return [
     key === null ? undefined : lt(auditEntries.seq, key),
     entity === undefined ? undefined : eq(auditEntries.entity, entity),

@@ -31,17 +31,30 @@ interface Link {
  * entry somewhere else to be able to tell.
  */
 export async function* verifyChains(client: Pick<Client, 'query'>): AsyncGenerator<ChainReport> {
-  const { rows: shops } = await client.query<{ id: string; name: string }>('select id, name from shops order by id');
-  for (const shop of shops) yield { shopId: shop.id, shop: shop.name, ...(await verifyChain(client, shop.id)) };
+  const { rows: shops } = await client.query<{ id: string; name: string }>(
+    'select id, name from shops order by id',
+  );
+  for (const shop of shops)
+    yield { shopId: shop.id, shop: shop.name, ...(await verifyChain(client, shop.id)) };
 }
 
-async function verifyChain(client: Pick<Client, 'query'>, shopId: string): Promise<{ entries: number; broken: BrokenLink | null }> {
+async function verifyChain(
+  client: Pick<Client, 'query'>,
+  shopId: string,
+): Promise<{ entries: number; broken: BrokenLink | null }> {
   let [entries, hash] = [0, ''];
   for (;;) {
-    const { rows } = await client.query<Link>('select e.seq, e.previous_hash, e.hash, audit_text(e) as text from audit_entries e where shop_id = $1 and seq > $2 order by seq limit $3', [shopId, entries, AT_ONCE]);
+    const { rows } = await client.query<Link>(
+      'select e.seq, e.previous_hash, e.hash, audit_text(e) as text from audit_entries e where shop_id = $1 and seq > $2 order by seq limit $3',
+      [shopId, entries, AT_ONCE],
+    );
     for (const link of rows) {
       const what = faultOf(link, entries + 1, hash);
-      if (what !== null) return { entries, broken: { shopId, seq: what === 'missing' ? entries + 1 : Number(link.seq), what } };
+      if (what !== null)
+        return {
+          entries,
+          broken: { shopId, seq: what === 'missing' ? entries + 1 : Number(link.seq), what },
+        };
       entries += 1;
       hash = link.hash;
     }
@@ -52,7 +65,9 @@ async function verifyChain(client: Pick<Client, 'query'>, shopId: string): Promi
 function faultOf(link: Link, seq: number, previousHash: string): BrokenLink['what'] | null {
   if (Number(link.seq) !== seq) return 'missing';
   if (link.previous_hash !== previousHash) return 'unlinked';
-  const computed = createHash('sha256').update(link.previous_hash + link.text, 'utf8').digest('hex');
+  const computed = createHash('sha256')
+    .update(link.previous_hash + link.text, 'utf8')
+    .digest('hex');
   return computed === link.hash ? null : 'altered';
 }
 

@@ -13,7 +13,9 @@ async function main(): Promise<number> {
     for await (const { shop, shopId, entries, broken } of verifyChains(client)) {
       if (broken === null) console.log(`${shop}: ${entries} entries, the chain holds.`);
       else {
-        console.error(`${shop}: BROKEN at entry ${broken.seq}, which ${BROKEN_WORDS[broken.what]}. ${entries} entries before it hold. (shop ${shopId})`);
+        console.error(
+          `${shop}: BROKEN at entry ${broken.seq}, which ${BROKEN_WORDS[broken.what]}. ${entries} entries before it hold. (shop ${shopId})`,
+        );
         exit = 1;
       }
     }

@@ -33,15 +33,23 @@ export interface Change {
 }
 
 /** The fields that are different, in words; with one side only, all of that side. */
-export function changesBetween(before: Record<string, unknown> | null, after: Record<string, unknown> | null): Change[] {
+export function changesBetween(
+  before: Record<string, unknown> | null,
+  after: Record<string, unknown> | null,
+): Change[] {
   const names = [...new Set([...Object.keys(before ?? {}), ...Object.keys(after ?? {})])];
   return names
-    .map((name) => ({ field: fieldWords(name), before: wordsOf(name, before?.[name]), after: wordsOf(name, after?.[name]) }))
+    .map((name) => ({
+      field: fieldWords(name),
+      before: wordsOf(name, before?.[name]),
+      after: wordsOf(name, after?.[name]),
+    }))
     .filter((change) => change.before !== change.after);
 }
 
 /** Sums are kept in minor units and read in whole ones. */
-const wordsOf = (name: string, value: unknown): string | null => (name.endsWith('Minor') && typeof value === 'number' ? amountText(value) : valueWords(value));
+const wordsOf = (name: string, value: unknown): string | null =>
+  name.endsWith('Minor') && typeof value === 'number' ? amountText(value) : valueWords(value);
 
 const fieldWords = (name: string): string =>
   name
@@ -54,7 +62,10 @@ function valueWords(value: unknown): string | null {
   if (value === undefined || value === null || value === '') return null;
   if (typeof value === 'string') return value;
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
-  if (Array.isArray(value)) return value.map((item) => valueWords(item) ?? 'none').join(value.some((item) => typeof item === 'object') ? '; ' : ', ');
+  if (Array.isArray(value))
+    return value
+      .map((item) => valueWords(item) ?? 'none')
+      .join(value.some((item) => typeof item === 'object') ? '; ' : ', ');
   return typeof value === 'object' ? objectWords(value) : JSON.stringify(value);
 }
 
@@ -62,6 +73,8 @@ const ID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/;
 
 /** What is nothing or an id inside a thing tells a reader nothing; the entry itself keeps it. */
 function objectWords(value: object): string {
-  const told = Object.entries(value).filter(([, inner]) => !(typeof inner === 'string' && ID.test(inner)) && valueWords(inner) !== null);
+  const told = Object.entries(value).filter(
+    ([, inner]) => !(typeof inner === 'string' && ID.test(inner)) && valueWords(inner) !== null,
+  );
   return told.map(([name, inner]) => `${fieldWords(name)} ${valueWords(inner) ?? ''}`).join(', ');
 }

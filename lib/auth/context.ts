@@ -6,7 +6,14 @@ import type { Role } from './roles';
 export type Actor =
   | { kind: 'person'; userId: string; name: string; roles: readonly Role[] }
   /** A program with a person's token: the person's roles, narrowed to the token's scopes. */
-  | { kind: 'token'; tokenId: string; userId: string; name: string; roles: readonly Role[]; scopes: readonly string[] }
+  | {
+      kind: 'token';
+      tokenId: string;
+      userId: string;
+      name: string;
+      roles: readonly Role[];
+      scopes: readonly string[];
+    }
   /** Whoever opened the link in a dispatch mail: the processor, for that batch. */
   | { kind: 'link'; linkId: string; name: string; roles: readonly ['processor'] }
   | { kind: 'job'; name: string; roles: readonly [] }
@@ -32,4 +39,5 @@ export function shopOf(ctx: Ctx): string {
 }
 
 /** The signed-in person's id, or null for links and jobs. */
-export const personOf = (actor: Actor): string | null => (actor.kind === 'person' || actor.kind === 'token' ? actor.userId : null);
+export const personOf = (actor: Actor): string | null =>
+  actor.kind === 'person' || actor.kind === 'token' ? actor.userId : null;

@@ -1,7 +1,8 @@
 import { hash, verify } from '@node-rs/argon2';
 
 // Compared when the account does not exist, so that the time of the answer does not tell which accounts do.
-const NOBODYS_HASH = '$argon2id$v=19$m=19456,t=2,p=1$Y1iT+t7lfPSyA+EcCNSCIw$HFhOVU2vJHwzjzqZrhDZWNFfLbnco/axpeoVH8+eWp0';
+const NOBODYS_HASH =
+  '$argon2id$v=19$m=19456,t=2,p=1$Y1iT+t7lfPSyA+EcCNSCIw$HFhOVU2vJHwzjzqZrhDZWNFfLbnco/axpeoVH8+eWp0';
 
 /** argon2id with the library's defaults: 19 MiB, two passes, one lane. */
 export const hashPassword = (password: string): Promise<string> => hash(password);

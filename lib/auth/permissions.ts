@@ -67,5 +67,15 @@ export type Permission = keyof typeof PERMISSIONS;
 
 /** Permissions a token may carry as scopes; nothing that needs a person's own hand (signing, paying, dispatching asks again). */
 export const TOKEN_SCOPES: readonly Permission[] = (Object.keys(PERMISSIONS) as Permission[]).filter(
-  (name) => !['public.use', 'self.manage', 'token.manage', 'certificate.prove', 'invoice.pay', 'portal.read', 'portal.answer', 'portal.account'].includes(name),
+  (name) =>
+    ![
+      'public.use',
+      'self.manage',
+      'token.manage',
+      'certificate.prove',
+      'invoice.pay',
+      'portal.read',
+      'portal.answer',
+      'portal.account',
+    ].includes(name),
 );

@@ -25,8 +25,13 @@ interface Asked {
 
 /** Whether a processor is approved for a process to a specification on a day; if not, by which approval it comes nearest. */
 export function approvalStanding(approvals: readonly Approval[], asked: Asked): ApprovalStanding {
-  const latestFirst = approvals.filter((approval) => covers(approval, asked)).sort((a, b) => b.validTo.localeCompare(a.validTo));
-  const standing = latestFirst.find((approval) => approval.withdrawnAt === null && approval.validFrom <= asked.on && asked.on <= approval.validTo);
+  const latestFirst = approvals
+    .filter((approval) => covers(approval, asked))
+    .sort((a, b) => b.validTo.localeCompare(a.validTo));
+  const standing = latestFirst.find(
+    (approval) =>
+      approval.withdrawnAt === null && approval.validFrom <= asked.on && asked.on <= approval.validTo,
+  );
   if (standing) return { state: 'approved', approval: standing };
   const [nearest] = latestFirst;
   if (!nearest) return { state: 'none' };
@@ -36,7 +41,10 @@ export function approvalStanding(approvals: readonly Approval[], asked: Asked): 
 
 function covers(approval: Approval, { process, specification }: Asked): boolean {
   if (!approval.processes.includes(process)) return false;
-  return approval.specifications.length === 0 || approval.specifications.some((one) => plain(one) === plain(specification));
+  return (
+    approval.specifications.length === 0 ||
+    approval.specifications.some((one) => plain(one) === plain(specification))
+  );
 }
 
 /** `AMS 2770` and `ams2770` are the same paper. */

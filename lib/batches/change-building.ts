@@ -18,7 +18,11 @@ export interface SeenBatch {
  *
  * @throws AppError `not_found`, or `conflict` when it has left, was cancelled or was changed meanwhile.
  */
-export async function changeBuilding(ctx: Ctx, { batchId, version }: SeenBatch, set: Partial<typeof batches.$inferInsert> = {}): Promise<Batch> {
+export async function changeBuilding(
+  ctx: Ctx,
+  { batchId, version }: SeenBatch,
+  set: Partial<typeof batches.$inferInsert> = {},
+): Promise<Batch> {
   const [batch] = await ctx.tx
     .update(batches)
     .set({ ...set, version: sql`${batches.version} + 1` })
@@ -42,9 +46,17 @@ async function whyNot(ctx: Ctx, batchId: string): Promise<AppError> {
     .where(eq(batches.id, batchId));
   if (!now) return notFound('batch');
   if (now.cancelledAt) return new AppError('conflict', `${now.number} was cancelled. Build a new batch.`);
-  if (now.dispatchedAt) return new AppError('conflict', `${now.number} has left already. Its lines and requirements are frozen; day, note and price change by a re-issue.`);
+  if (now.dispatchedAt)
+    return new AppError(
+      'conflict',
+      `${now.number} has left already. Its lines and requirements are frozen; day, note and price change by a re-issue.`,
+    );
   return changedMeanwhile('batch');
 }
 
 /** What every write of a batch tells: which one, and the version to send with the next change. */
-export const refOf = ({ id, number, version }: Batch): { id: string; number: string; version: number } => ({ id, number, version });
+export const refOf = ({ id, number, version }: Batch): { id: string; number: string; version: number } => ({
+  id,
+  number,
+  version,
+});

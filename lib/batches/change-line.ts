@@ -14,20 +14,33 @@ import type { changeLine as declaration } from './contract';
 import { refreshStanding } from './refresh-standing';
 
 /** Changes pieces, price or load of a line; pieces come from and go back to those that wait for the step. */
-export async function changeLine(ctx: Ctx, { batchId, version, lineId, ...change }: z.output<(typeof declaration)['input']>) {
+export async function changeLine(
+  ctx: Ctx,
+  { batchId, version, lineId, ...change }: z.output<(typeof declaration)['input']>,
+) {
   authorize(ctx, 'batch.build');
   const batch = await changeBuilding(ctx, { batchId, version });
   const before = await readPackedLine(ctx, { batchId, lineId });
   const pieces = change.pieces ?? before.pieces;
   await movePackedTo(ctx, before, pieces);
 
-  const set = { pieces, unitPriceMinor: change.unitPriceMinor ?? before.unitPriceMinor, loadNo: change.loadNo === undefined ? before.loadNo : change.loadNo };
+  const set = {
+    pieces,
+    unitPriceMinor: change.unitPriceMinor ?? before.unitPriceMinor,
+    loadNo: change.loadNo === undefined ? before.loadNo : change.loadNo,
+  };
   await ctx.tx.update(batchLines).set(set).where(eq(batchLines.id, lineId));
   await recordAudit(ctx, {
     action: 'batch.change_line',
     entity: 'batch',
     entityId: batchId,
-    before: { line: before.lineNo, lot: before.lotNumber, pieces: before.pieces, unitPriceMinor: before.unitPriceMinor, loadNo: before.loadNo },
+    before: {
+      line: before.lineNo,
+      lot: before.lotNumber,
+      pieces: before.pieces,
+      unitPriceMinor: before.unitPriceMinor,
+      loadNo: before.loadNo,
+    },
     after: { line: before.lineNo, lot: before.lotNumber, ...set },
   });
   await refreshStanding(ctx, batchId);
@@ -52,7 +65,14 @@ export async function readPackedLine(ctx: Ctx, { batchId, lineId }: { batchId: s
     })
     .from(batchLines)
     .innerJoin(lots, eq(lots.id, batchLines.lotId))
-    .leftJoin(balances, and(eq(balances.lotId, batchLines.lotId), eq(balances.place, 'making'), eq(balances.holderId, batchLines.stepId)))
+    .leftJoin(
+      balances,
+      and(
+        eq(balances.lotId, batchLines.lotId),
+        eq(balances.place, 'making'),
+        eq(balances.holderId, batchLines.stepId),
+      ),
+    )
     .where(and(eq(batchLines.id, lineId), eq(batchLines.batchId, batchId)));
   if (!line) throw notFound('line');
   return line;
@@ -65,10 +85,15 @@ export async function movePackedTo(ctx: Ctx, line: PackedLine, pieces: number): 
   const most = line.pieces + line.waiting;
   if (pieces > most) {
     const message = `The lot has ${most}. Enter ${most} or less.`;
-    throw new AppError('bad_input', `${line.lotNumber}: ${message}`, { fields: [{ field: 'pieces', message }] });
+    throw new AppError('bad_input', `${line.lotNumber}: ${message}`, {
+      fields: [{ field: 'pieces', message }],
+    });
   }
   const waiting = { place: 'making', holderId: line.stepId } as const;
   const packed = { place: 'packed', holderId: line.id } as const;
-  const way = more > 0 ? ({ from: waiting, to: packed, reason: 'packed' } as const) : ({ from: packed, to: waiting, reason: 'unpacked' } as const);
+  const way =
+    more > 0
+      ? ({ from: waiting, to: packed, reason: 'packed' } as const)
+      : ({ from: packed, to: waiting, reason: 'unpacked' } as const);
   await movePieces(ctx, { lotId: line.lotId, pieces: Math.abs(more), batchLineId: line.id, ...way });
 }

@@ -31,7 +31,11 @@ export const getBatchChecks = declare({
 export type BatchFinding = z.output<typeof Finding>;
 
 /** Short reasons say nothing to whoever asks in five years. */
-const Reason = z.string().trim().min(20, 'Say why in 20 letters or more; it prints on the traveller.').max(1000, 'Keep it under 1000 letters.');
+const Reason = z
+  .string()
+  .trim()
+  .min(20, 'Say why in 20 letters or more; it prints on the traveller.')
+  .max(1000, 'Keep it under 1000 letters.');
 
 export const overrideCheck = declare({
   id: 'overrideCheck',

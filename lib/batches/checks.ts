@@ -8,7 +8,17 @@ export const CHECK_LEVELS = ['stop', 'warn', 'note'] as const;
 export type CheckLevel = (typeof CHECK_LEVELS)[number];
 
 /** What the person can do about it, in place. */
-export const WAYS_OUT = ['override', 'take_out_line', 'add_lot', 'set_days', 'set_prices', 'set_requirements', 'choose_processor', 'see_processor', 'take_up'] as const;
+export const WAYS_OUT = [
+  'override',
+  'take_out_line',
+  'add_lot',
+  'set_days',
+  'set_prices',
+  'set_requirements',
+  'choose_processor',
+  'see_processor',
+  'take_up',
+] as const;
 export interface WayOut {
   way: (typeof WAYS_OUT)[number];
   says: string;
@@ -67,7 +77,16 @@ const hasLines: Check = {
   look: ({ lines, batch }) =>
     lines.length > 0
       ? []
-      : [{ code: 'empty_batch', level: 'stop', subject: '', sentence: 'Nothing is in it.', rest: `${batch.number} has no line. Add a lot that waits for a step.`, waysOut: [{ way: 'add_lot', says: 'Add a lot' }] }],
+      : [
+          {
+            code: 'empty_batch',
+            level: 'stop',
+            subject: '',
+            sentence: 'Nothing is in it.',
+            rest: `${batch.number} has no line. Add a lot that waits for a step.`,
+            waysOut: [{ way: 'add_lot', says: 'Add a lot' }],
+          },
+        ],
 };
 
 const worksForUs: Check = {
@@ -75,7 +94,19 @@ const worksForUs: Check = {
   look: ({ processor }) =>
     processor.active
       ? []
-      : [{ code: 'processor_inactive', level: 'stop', subject: processor.id, sentence: `You no longer work with ${processor.name}.`, rest: 'Choose another processor, or take this one up again.', waysOut: [{ way: 'choose_processor', says: 'Choose another' }, { way: 'see_processor', says: 'See the processor' }] }],
+      : [
+          {
+            code: 'processor_inactive',
+            level: 'stop',
+            subject: processor.id,
+            sentence: `You no longer work with ${processor.name}.`,
+            rest: 'Choose another processor, or take this one up again.',
+            waysOut: [
+              { way: 'choose_processor', says: 'Choose another' },
+              { way: 'see_processor', says: 'See the processor' },
+            ],
+          },
+        ],
 };
 
 const isApproved: Check = {
@@ -87,9 +118,24 @@ const isApproved: Check = {
     const day = (when: CalendarDay | Date) => dayWords(when, facts);
     const why = {
       none: ['is not approved for this.', `No approval names ${stepWords(batch)}.`],
-      expired: ['is no longer approved.', standing.state === 'none' ? '' : `Approval ${standing.approval.reference} ended ${day(standing.approval.validTo)}.`],
-      not_yet: ['is not approved yet.', standing.state === 'none' ? '' : `Approval ${standing.approval.reference} begins ${day(standing.approval.validFrom)}.`],
-      withdrawn: ['is no longer approved.', standing.state === 'none' ? '' : `Approval ${standing.approval.reference} was withdrawn${standing.approval.withdrawnAt ? ` ${day(standing.approval.withdrawnAt)}` : ''}.`],
+      expired: [
+        'is no longer approved.',
+        standing.state === 'none'
+          ? ''
+          : `Approval ${standing.approval.reference} ended ${day(standing.approval.validTo)}.`,
+      ],
+      not_yet: [
+        'is not approved yet.',
+        standing.state === 'none'
+          ? ''
+          : `Approval ${standing.approval.reference} begins ${day(standing.approval.validFrom)}.`,
+      ],
+      withdrawn: [
+        'is no longer approved.',
+        standing.state === 'none'
+          ? ''
+          : `Approval ${standing.approval.reference} was withdrawn${standing.approval.withdrawnAt ? ` ${day(standing.approval.withdrawnAt)}` : ''}.`,
+      ],
     }[standing.state];
     return [
       {
@@ -98,8 +144,13 @@ const isApproved: Check = {
         subject: processor.id,
         sentence: `${processor.name} ${why[0]}`,
         rest: why[1] ?? '',
-        source: standing.state === 'none' ? 'Your list of approvals' : `Approval ${standing.approval.reference}`,
-        waysOut: [{ way: 'choose_processor', says: 'Choose another' }, { way: 'see_processor', says: 'See the approvals' }, OVERRIDE],
+        source:
+          standing.state === 'none' ? 'Your list of approvals' : `Approval ${standing.approval.reference}`,
+        waysOut: [
+          { way: 'choose_processor', says: 'Choose another' },
+          { way: 'see_processor', says: 'See the approvals' },
+          OVERRIDE,
+        ],
       },
     ];
   },
@@ -110,7 +161,12 @@ const isApprovedUntilBack: Check = {
   look(facts) {
     const { batch, processor, today } = facts;
     const standing = approvalStanding(processor.approvals, { ...batch, on: today });
-    if (standing.state !== 'approved' || batch.wantedBackOn === null || standing.approval.validTo > batch.wantedBackOn) return [];
+    if (
+      standing.state !== 'approved' ||
+      batch.wantedBackOn === null ||
+      standing.approval.validTo > batch.wantedBackOn
+    )
+      return [];
     const sameDay = standing.approval.validTo === batch.wantedBackOn;
     return [
       {
@@ -118,7 +174,9 @@ const isApprovedUntilBack: Check = {
         level: 'warn',
         subject: processor.id,
         sentence: `${processor.name} is approved to ${dayWords(standing.approval.validTo, facts)},`,
-        rest: sameDay ? 'the day you want the pieces back.' : `you want the pieces back ${dayWords(batch.wantedBackOn, facts)}.`,
+        rest: sameDay
+          ? 'the day you want the pieces back.'
+          : `you want the pieces back ${dayWords(batch.wantedBackOn, facts)}.`,
         source: `Approval ${standing.approval.reference}`,
         waysOut: [{ way: 'set_days', says: 'Change the day' }],
       },
@@ -138,7 +196,10 @@ const isOneStep: Check = {
         sentence: `Line ${line.lineNo} is of another step.`,
         rest: `The route of ${line.partNumber} rev ${line.partRevision} says ${stepWords(line.step)}; this batch is ${stepWords(batch)}.`,
         source: `Route of ${line.partNumber}`,
-        waysOut: [{ way: 'take_out_line' as const, says: `Take line ${line.lineNo} out`, lineId: line.id }, OVERRIDE],
+        waysOut: [
+          { way: 'take_out_line' as const, says: `Take line ${line.lineNo} out`, lineId: line.id },
+          OVERRIDE,
+        ],
       })),
 };
 
@@ -181,9 +242,28 @@ const hasDay: Check = {
   look(facts) {
     const { wantedBackOn } = facts.batch;
     const waysOut: WayOut[] = [{ way: 'set_days', says: 'Set the day' }];
-    if (wantedBackOn === null) return [{ code: 'no_wanted_day', level: 'warn', subject: '', sentence: 'No day is asked for.', rest: 'The processor will not know when you want the pieces back.', waysOut }];
+    if (wantedBackOn === null)
+      return [
+        {
+          code: 'no_wanted_day',
+          level: 'warn',
+          subject: '',
+          sentence: 'No day is asked for.',
+          rest: 'The processor will not know when you want the pieces back.',
+          waysOut,
+        },
+      ];
     if (daysUntil(wantedBackOn, facts) > 0) return [];
-    return [{ code: 'wanted_day_past', level: 'warn', subject: '', sentence: 'The day you want it back is here.', rest: `It says ${dayWords(wantedBackOn, facts)}.`, waysOut }];
+    return [
+      {
+        code: 'wanted_day_past',
+        level: 'warn',
+        subject: '',
+        sentence: 'The day you want it back is here.',
+        rest: `It says ${dayWords(wantedBackOn, facts)}.`,
+        waysOut,
+      },
+    ];
   },
 };
 
@@ -195,10 +275,28 @@ const hasPrice: Check = {
     if (unpriced.length === 0) return [];
     if (unpriced.length < lines.length) {
       const numbers = unpriced.map((line) => line.lineNo).join(', ');
-      return [{ code: 'line_without_price', level: 'note', subject: '', sentence: `${unpriced.length === 1 ? `Line ${numbers} has` : `Lines ${numbers} have`} no price.`, rest: 'The order counts them as nothing.', waysOut }];
+      return [
+        {
+          code: 'line_without_price',
+          level: 'note',
+          subject: '',
+          sentence: `${unpriced.length === 1 ? `Line ${numbers} has` : `Lines ${numbers} have`} no price.`,
+          rest: 'The order counts them as nothing.',
+          waysOut,
+        },
+      ];
     }
     if (batch.lotMinimumMinor > 0) return [];
-    return [{ code: 'no_price', level: 'warn', subject: '', sentence: 'The order states no price.', rest: 'An invoice will have nothing to be compared with.', waysOut }];
+    return [
+      {
+        code: 'no_price',
+        level: 'warn',
+        subject: '',
+        sentence: 'The order states no price.',
+        rest: 'An invoice will have nothing to be compared with.',
+        waysOut,
+      },
+    ];
   },
 };
 
@@ -207,11 +305,31 @@ const isTakenUp: Check = {
   look: (facts) =>
     facts.batch.putAsideAt === null
       ? []
-      : [{ code: 'put_aside', level: 'note', subject: '', sentence: `It was put aside ${dayWords(facts.batch.putAsideAt, facts)}.`, rest: 'Dispatching it takes it up again.', waysOut: [{ way: 'take_up', says: 'Take it up' }] }],
+      : [
+          {
+            code: 'put_aside',
+            level: 'note',
+            subject: '',
+            sentence: `It was put aside ${dayWords(facts.batch.putAsideAt, facts)}.`,
+            rest: 'Dispatching it takes it up again.',
+            waysOut: [{ way: 'take_up', says: 'Take it up' }],
+          },
+        ],
 };
 
 /** The order they are shown in within their level. Rules of the trade join this list with the trade library. */
-const CHECKS: readonly Check[] = [hasLines, worksForUs, isApproved, isOneStep, isApprovedUntilBack, isProvable, isCurrent, hasDay, hasPrice, isTakenUp];
+const CHECKS: readonly Check[] = [
+  hasLines,
+  worksForUs,
+  isApproved,
+  isOneStep,
+  isApprovedUntilBack,
+  isProvable,
+  isCurrent,
+  hasDay,
+  hasPrice,
+  isTakenUp,
+];
 
 export interface Checked {
   /** What stops it first, then what warns, then notes. */
@@ -231,4 +349,5 @@ export function checkBatch(facts: CheckFacts): Checked {
 }
 
 /** An admin may let a blocker pass with a reason where the finding offers it. */
-export const canOverride = (finding: Finding): boolean => finding.level === 'stop' && finding.waysOut.some((one) => one.way === 'override');
+export const canOverride = (finding: Finding): boolean =>
+  finding.level === 'stop' && finding.waysOut.some((one) => one.way === 'override');

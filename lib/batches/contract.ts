@@ -34,7 +34,10 @@ export const BatchRef = z.object({ id: Id, number: z.string(), version: z.int() 
 /** The version of the batch that the person saw; an older one is refused, so that nobody's change is lost. */
 export const Seen = z.object({ batchId: Id, version: z.int().min(1) });
 
-export const Price = z.int('Enter an amount.').min(0, 'Enter 0 or more.').max(100_000_000, 'Enter 1,000,000.00 or less.');
+export const Price = z
+  .int('Enter an amount.')
+  .min(0, 'Enter 0 or more.')
+  .max(100_000_000, 'Enter 1,000,000.00 or less.');
 export const Note = z.string().trim().max(2000, 'Keep it under 2000 letters.');
 
 export const NewLine = z.object({
@@ -80,7 +83,11 @@ export const Batch = z.object({
   process: z.enum(PROCESSES),
   /** With revision and class, in words; its parts stand in `step`. */
   specification: z.string(),
-  step: z.object({ specification: z.string(), specificationRevision: z.string().nullable(), classType: z.string().nullable() }),
+  step: z.object({
+    specification: z.string(),
+    specificationRevision: z.string().nullable(),
+    classType: z.string().nullable(),
+  }),
   note: z.string().nullable(),
   leavesOn: z.string().nullable(),
   wantedBackOn: z.string().nullable(),
@@ -169,7 +176,9 @@ export const createBatch = declare({
   summary: 'Build a batch for one processor from lots that wait for the same step',
   side: 'shop',
   permission: 'batch.build',
-  input: z.object({ processorId: Id, lines: z.array(NewLine).min(1, 'Add at least one lot.').max(200) }).extend(Terms.partial().shape),
+  input: z
+    .object({ processorId: Id, lines: z.array(NewLine).min(1, 'Add at least one lot.').max(200) })
+    .extend(Terms.partial().shape),
   response: BatchRef,
 });
 export type CreateBatchInput = z.output<(typeof createBatch)['input']>;
@@ -192,7 +201,12 @@ export const changeLine = declare({
   summary: 'Change pieces, price or load of a line',
   side: 'shop',
   permission: 'batch.build',
-  input: Seen.extend({ lineId: Id, pieces: Pieces.optional(), unitPriceMinor: Price.optional(), loadNo: z.int().min(1).max(9).nullable().optional() }),
+  input: Seen.extend({
+    lineId: Id,
+    pieces: Pieces.optional(),
+    unitPriceMinor: Price.optional(),
+    loadNo: z.int().min(1).max(9).nullable().optional(),
+  }),
   response: BatchRef,
 });
 

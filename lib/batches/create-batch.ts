@@ -19,9 +19,15 @@ export async function createBatch(ctx: Ctx, { processorId, lines, ...terms }: Cr
   authorize(ctx, 'batch.build');
   await requireOwnProcessor(ctx, processorId);
   const [first] = lines;
-  if (!first) throw new AppError('bad_input', 'Add at least one lot.', { fields: [{ field: 'lines', message: 'Add at least one lot.' }] });
+  if (!first)
+    throw new AppError('bad_input', 'Add at least one lot.', {
+      fields: [{ field: 'lines', message: 'Add at least one lot.' }],
+    });
   const step = await readWaitingStep(ctx, first, 'lines.0.lotId');
-  const [shop] = await ctx.tx.select({ currency: shops.currency, orderPrefix: shops.orderPrefix }).from(shops).where(eq(shops.id, shopOf(ctx)));
+  const [shop] = await ctx.tx
+    .select({ currency: shops.currency, orderPrefix: shops.orderPrefix })
+    .from(shops)
+    .where(eq(shops.id, shopOf(ctx)));
   if (!shop) throw new Error('no shop to build in');
 
   const [batch] = await ctx.tx
@@ -53,7 +59,12 @@ export async function createBatch(ctx: Ctx, { processorId, lines, ...terms }: Cr
     await packLine(ctx, batch, line, { lineNo: at + 1, step: waiting, prefix: `lines.${at}.` });
     packed.push(`${waiting.lotNumber}, ${line.pieces} pc`);
   }
-  await recordAudit(ctx, { action: 'batch.create', entity: 'batch', entityId: batch.id, after: { number: batch.number, orderNumber: batch.orderNumber, processorId, lines: packed } });
+  await recordAudit(ctx, {
+    action: 'batch.create',
+    entity: 'batch',
+    entityId: batch.id,
+    after: { number: batch.number, orderNumber: batch.orderNumber, processorId, lines: packed },
+  });
   await refreshStanding(ctx, batch.id);
   return refOf(batch);
 }
@@ -65,6 +76,8 @@ export async function requireOwnProcessor(ctx: Ctx, processorId: string): Promis
     .from(shopProcessors)
     .where(and(eq(shopProcessors.shopId, shopOf(ctx)), eq(shopProcessors.processorId, processorId)));
   if (own?.active) return;
-  const message = own ? 'You no longer work with this processor. Choose another.' : 'Choose one of your processors.';
+  const message = own
+    ? 'You no longer work with this processor. Choose another.'
+    : 'Choose one of your processors.';
   throw new AppError('bad_input', message, { fields: [{ field: 'processorId', message }] });
 }

@@ -29,10 +29,17 @@ export async function dispatchBatch(ctx: Ctx, { batchId, version }: z.output<(ty
   const stopping = await readStopping(ctx, batchId);
   if (stopping.length > 0) {
     const [first] = stopping;
-    throw new AppError('conflict', `${batch.number} stays here: ${first?.sentence ?? ''} ${first?.rest ?? ''}`.trim(), { extra: { stops: stopping } });
+    throw new AppError(
+      'conflict',
+      `${batch.number} stays here: ${first?.sentence ?? ''} ${first?.rest ?? ''}`.trim(),
+      { extra: { stops: stopping } },
+    );
   }
 
-  await ctx.tx.update(batches).set({ dispatchedAt: ctx.now, dispatchedBy: personOf(ctx.actor), putAsideAt: null }).where(eq(batches.id, batchId));
+  await ctx.tx
+    .update(batches)
+    .set({ dispatchedAt: ctx.now, dispatchedBy: personOf(ctx.actor), putAsideAt: null })
+    .where(eq(batches.id, batchId));
   const lines = await freezeLines(ctx, batchId);
   const papers = await statePapers(ctx, batchId, { mail: 'dispatch', changes: [] });
   for (const line of lines) {
@@ -49,7 +56,13 @@ export async function dispatchBatch(ctx: Ctx, { batchId, version }: z.output<(ty
     action: 'batch.dispatch',
     entity: 'batch',
     entityId: batchId,
-    after: { number: batch.number, orderNumber: batch.orderNumber, processorId: batch.processorId, pieces: lines.reduce((sum, line) => sum + line.pieces, 0), papers },
+    after: {
+      number: batch.number,
+      orderNumber: batch.orderNumber,
+      processorId: batch.processorId,
+      pieces: lines.reduce((sum, line) => sum + line.pieces, 0),
+      papers,
+    },
   });
   await refreshStanding(ctx, batchId);
   return refOf(batch);
@@ -60,6 +73,11 @@ async function readStopping(ctx: Ctx, batchId: string): Promise<Finding[]> {
   const { findings } = checkBatch(await readCheckFacts(ctx, batchId));
   const passed = await readOverrides(ctx, batchId);
   return findings.filter(
-    (finding) => finding.level === 'stop' && !(canOverride(finding) && passed.some((one) => one.check === finding.code && one.subject === finding.subject)),
+    (finding) =>
+      finding.level === 'stop' &&
+      !(
+        canOverride(finding) &&
+        passed.some((one) => one.check === finding.code && one.subject === finding.subject)
+      ),
   );
 }

@@ -23,5 +23,10 @@ export interface ExpectedPrice {
 export function expectedPrice({ lotMinimumMinor, certificationFeeMinor, lines }: PricedOrder): ExpectedPrice {
   const workMinor = lines.reduce((sum, line) => sum + line.pieces * line.unitPriceMinor, 0);
   const toMinimumMinor = lines.length === 0 ? 0 : Math.max(0, lotMinimumMinor - workMinor);
-  return { workMinor, toMinimumMinor, certificationFeeMinor, totalMinor: workMinor + toMinimumMinor + certificationFeeMinor };
+  return {
+    workMinor,
+    toMinimumMinor,
+    certificationFeeMinor,
+    totalMinor: workMinor + toMinimumMinor + certificationFeeMinor,
+  };
 }

@@ -39,13 +39,21 @@ export async function readLinesAsTheyAre(ctx: Ctx, batchId: string) {
 }
 
 async function serialsPackedIn(ctx: Ctx, lineId: string): Promise<string[]> {
-  const found = await ctx.tx.select({ serial: pieces.serial }).from(pieces).where(and(eq(pieces.place, 'packed'), eq(pieces.holderId, lineId))).orderBy(asc(pieces.serial));
+  const found = await ctx.tx
+    .select({ serial: pieces.serial })
+    .from(pieces)
+    .where(and(eq(pieces.place, 'packed'), eq(pieces.holderId, lineId)))
+    .orderBy(asc(pieces.serial));
   return found.map((piece) => piece.serial);
 }
 
 /** Writes into each line what it says at this moment; later changes to part, route or lot do not reach it. */
-export async function freezeLines(ctx: Ctx, batchId: string): Promise<{ id: string; lotId: string; pieces: number }[]> {
+export async function freezeLines(
+  ctx: Ctx,
+  batchId: string,
+): Promise<{ id: string; lotId: string; pieces: number }[]> {
   const lines = await readLinesAsTheyAre(ctx, batchId);
-  for (const { line, now } of lines) await ctx.tx.update(batchLines).set({ frozen: now }).where(eq(batchLines.id, line.id));
+  for (const { line, now } of lines)
+    await ctx.tx.update(batchLines).set({ frozen: now }).where(eq(batchLines.id, line.id));
   return lines.map(({ line }) => ({ id: line.id, lotId: line.lotId, pieces: line.pieces }));
 }

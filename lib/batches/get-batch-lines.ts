@@ -17,7 +17,14 @@ export async function getBatchLines(ctx: Ctx, { batchId }: { batchId: string }) 
   const waiting = await ctx.tx
     .select({ lineId: batchLines.id, pieces: sql<number>`${balances.pieces}::int` })
     .from(batchLines)
-    .innerJoin(balances, and(eq(balances.lotId, batchLines.lotId), eq(balances.place, 'making'), eq(balances.holderId, batchLines.stepId)))
+    .innerJoin(
+      balances,
+      and(
+        eq(balances.lotId, batchLines.lotId),
+        eq(balances.place, 'making'),
+        eq(balances.holderId, batchLines.stepId),
+      ),
+    )
     .where(eq(batchLines.batchId, batchId));
   const asked = await ctx.tx
     .select({

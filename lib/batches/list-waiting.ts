@@ -12,7 +12,10 @@ import { calendarDay, dayWords, type Clock } from '@/lib/day-words';
 
 import { approvalStanding, type Approval, type ApprovalStanding } from './approval';
 import { materialWords } from './material-words';
-import type { listStepProcessors as processorsDeclaration, listWaitingLots as lotsDeclaration } from './waiting-contract';
+import type {
+  listStepProcessors as processorsDeclaration,
+  listWaitingLots as lotsDeclaration,
+} from './waiting-contract';
 
 const waits = and(eq(balances.place, 'making'), gt(balances.pieces, 0));
 
@@ -34,13 +37,29 @@ export async function listWaitingSteps(ctx: Ctx) {
     .innerJoin(routeSteps, eq(routeSteps.id, balances.holderId))
     .innerJoin(lots, eq(lots.id, balances.lotId))
     .where(waits)
-    .groupBy(routeSteps.process, routeSteps.specification, routeSteps.specificationRevision, routeSteps.classType)
+    .groupBy(
+      routeSteps.process,
+      routeSteps.specification,
+      routeSteps.specificationRevision,
+      routeSteps.classType,
+    )
     .orderBy(desc(pieces), asc(routeSteps.process), asc(routeSteps.specification));
   return { steps: steps.map((step) => ({ ...step, since: new Date(step.since) })) };
 }
 
 /** Oldest lot first. Lots that already have a line on `besideBatchId` are changed there, not added again. */
-export async function listWaitingLots(ctx: Ctx, { after, limit, process, specification, specificationRevision, classType, besideBatchId }: z.output<(typeof lotsDeclaration)['input']>) {
+export async function listWaitingLots(
+  ctx: Ctx,
+  {
+    after,
+    limit,
+    process,
+    specification,
+    specificationRevision,
+    classType,
+    besideBatchId,
+  }: z.output<(typeof lotsDeclaration)['input']>,
+) {
   authorize(ctx, 'batch.read');
   const rows = await ctx.tx
     .select({
@@ -72,22 +91,39 @@ export async function listWaitingLots(ctx: Ctx, { after, limit, process, specifi
         waits,
         eq(routeSteps.process, process),
         eq(routeSteps.specification, specification),
-        specificationRevision === undefined ? isNull(routeSteps.specificationRevision) : eq(routeSteps.specificationRevision, specificationRevision),
+        specificationRevision === undefined
+          ? isNull(routeSteps.specificationRevision)
+          : eq(routeSteps.specificationRevision, specificationRevision),
         classType === undefined ? isNull(routeSteps.classType) : eq(routeSteps.classType, classType),
-        besideBatchId === undefined ? undefined : sql`not exists (select 1 from ${batchLines} l where l.batch_id = ${besideBatchId} and l.lot_id = ${lots.id} and l.step_id = ${routeSteps.id})`,
+        besideBatchId === undefined
+          ? undefined
+          : sql`not exists (select 1 from ${batchLines} l where l.batch_id = ${besideBatchId} and l.lot_id = ${lots.id} and l.step_id = ${routeSteps.id})`,
         after === undefined ? undefined : gt(lots.id, after),
       ),
     )
     .orderBy(asc(lots.id))
     .limit(limit + 1);
   const page = toPage(rows, limit, (row) => row.lotId);
-  return { ...page, rows: page.rows.map(({ alloy, clad, form, supersededAt, ...row }) => ({ ...row, material: materialWords({ alloy, clad, form }), partSuperseded: supersededAt !== null })) };
+  return {
+    ...page,
+    rows: page.rows.map(({ alloy, clad, form, supersededAt, ...row }) => ({
+      ...row,
+      material: materialWords({ alloy, clad, form }),
+      partSuperseded: supersededAt !== null,
+    })),
+  };
 }
 
 /** Every processor the shop works with: those approved for the step today first, the others with the reason. */
-export async function listStepProcessors(ctx: Ctx, { process, specification }: z.output<(typeof processorsDeclaration)['input']>) {
+export async function listStepProcessors(
+  ctx: Ctx,
+  { process, specification }: z.output<(typeof processorsDeclaration)['input']>,
+) {
   authorize(ctx, 'batch.read');
-  const [shop] = await ctx.tx.select({ zone: shops.zone }).from(shops).where(eq(shops.id, shopOf(ctx)));
+  const [shop] = await ctx.tx
+    .select({ zone: shops.zone })
+    .from(shops)
+    .where(eq(shops.id, shopOf(ctx)));
   const clock = { zone: shop?.zone ?? 'UTC', now: ctx.now };
   const today = calendarDay(ctx.now, clock.zone);
   const all = await ctx.tx
@@ -98,10 +134,20 @@ export async function listStepProcessors(ctx: Ctx, { process, specification }: z
     .orderBy(asc(processors.name));
   const given = await ctx.tx.select().from(approvals);
   const standings = all.map((one) => {
-    const standing = approvalStanding(given.filter((approval) => approval.processorId === one.processorId) satisfies Approval[], { process, specification, on: today });
-    return { ...one, approved: standing.state === 'approved', says: standingWords(standing, clock), approvalEndsOn: standing.state === 'approved' ? standing.approval.validTo : null };
+    const standing = approvalStanding(
+      given.filter((approval) => approval.processorId === one.processorId) satisfies Approval[],
+      { process, specification, on: today },
+    );
+    return {
+      ...one,
+      approved: standing.state === 'approved',
+      says: standingWords(standing, clock),
+      approvalEndsOn: standing.state === 'approved' ? standing.approval.validTo : null,
+    };
   });
-  return { processors: [...standings.filter((one) => one.approved), ...standings.filter((one) => !one.approved)] };
+  return {
+    processors: [...standings.filter((one) => one.approved), ...standings.filter((one) => !one.approved)],
+  };
 }
 
 function standingWords(standing: ApprovalStanding, clock: Clock): string {
@@ -109,5 +155,7 @@ function standingWords(standing: ApprovalStanding, clock: Clock): string {
   const { reference, validFrom, validTo, withdrawnAt } = standing.approval;
   if (standing.state === 'approved') return `approved to ${dayWords(validTo, clock)}, ${reference}`;
   if (standing.state === 'not_yet') return `${reference} begins ${dayWords(validFrom, clock)}`;
-  return standing.state === 'expired' ? `${reference} ended ${dayWords(validTo, clock)}` : `${reference} was withdrawn${withdrawnAt ? ` ${dayWords(withdrawnAt, clock)}` : ''}`;
+  return standing.state === 'expired'
+    ? `${reference} ended ${dayWords(validTo, clock)}`
+    : `${reference} was withdrawn${withdrawnAt ? ` ${dayWords(withdrawnAt, clock)}` : ''}`;
 }

@@ -1,4 +1,12 @@
 import type { ProductForm } from '@/lib/trade/process';
 
 /** `2024 clad sheet` */
-export const materialWords = ({ alloy, clad, form }: { alloy: string; clad: boolean; form: ProductForm }): string => `${alloy}${clad ? ' clad' : ''} ${form}`;
+export const materialWords = ({
+  alloy,
+  clad,
+  form,
+}: {
+  alloy: string;
+  clad: boolean;
+  form: ProductForm;
+}): string => `${alloy}${clad ? ' clad' : ''} ${form}`;

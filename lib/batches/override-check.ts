@@ -14,7 +14,10 @@ import { readCheckFacts } from './read-check-facts';
 import { refreshStanding } from './refresh-standing';
 
 /** Lets a blocker of a batch pass, for exactly what it names; the reason prints on the traveller. */
-export async function overrideCheck(ctx: Ctx, { batchId, version, check, subject, reason }: z.output<(typeof declaration)['input']>) {
+export async function overrideCheck(
+  ctx: Ctx,
+  { batchId, version, check, subject, reason }: z.output<(typeof declaration)['input']>,
+) {
   authorize(ctx, 'batch.override');
   const batch = await changeBuilding(ctx, { batchId, version });
   const by = personOf(ctx.actor);
@@ -24,9 +27,18 @@ export async function overrideCheck(ctx: Ctx, { batchId, version, check, subject
   if (!finding) throw new AppError('conflict', 'This no longer stops the batch. Look again.');
   if (!canOverride(finding)) throw new AppError('conflict', `${finding.sentence} This cannot be let pass.`);
 
-  const [added] = await ctx.tx.insert(overrides).values({ id: newId(), shopId: shopOf(ctx), batchId, check, subject, reason, by, createdAt: ctx.now }).onConflictDoNothing().returning({ id: overrides.id });
+  const [added] = await ctx.tx
+    .insert(overrides)
+    .values({ id: newId(), shopId: shopOf(ctx), batchId, check, subject, reason, by, createdAt: ctx.now })
+    .onConflictDoNothing()
+    .returning({ id: overrides.id });
   if (!added) throw new AppError('conflict', 'This was let pass already.');
-  await recordAudit(ctx, { action: 'batch.override', entity: 'batch', entityId: batchId, after: { check, subject, what: finding.sentence, reason } });
+  await recordAudit(ctx, {
+    action: 'batch.override',
+    entity: 'batch',
+    entityId: batchId,
+    after: { check, subject, what: finding.sentence, reason },
+  });
   await refreshStanding(ctx, batchId);
   return refOf(batch);
 }

@@ -23,7 +23,11 @@ export interface WaitingStep extends StepAsked {
 }
 
 /** The step of a line to be, with what waits there. `field` is where the person gave it, for the refusal. */
-export async function readWaitingStep(ctx: Ctx, { lotId, stepId }: NewLine, field = 'lotId'): Promise<WaitingStep> {
+export async function readWaitingStep(
+  ctx: Ctx,
+  { lotId, stepId }: NewLine,
+  field = 'lotId',
+): Promise<WaitingStep> {
   const [found] = await ctx.tx
     .select({
       lotId: lots.id,
@@ -40,14 +44,25 @@ export async function readWaitingStep(ctx: Ctx, { lotId, stepId }: NewLine, fiel
     .from(lots)
     .innerJoin(parts, eq(parts.id, lots.partId))
     .innerJoin(routeSteps, and(eq(routeSteps.partId, parts.id), eq(routeSteps.id, stepId)))
-    .leftJoin(balances, and(eq(balances.lotId, lots.id), eq(balances.place, 'making'), eq(balances.holderId, routeSteps.id)))
+    .leftJoin(
+      balances,
+      and(eq(balances.lotId, lots.id), eq(balances.place, 'making'), eq(balances.holderId, routeSteps.id)),
+    )
     .where(eq(lots.id, lotId));
-  if (!found) throw new AppError('bad_input', 'This lot has no such step.', { fields: [{ field, message: 'Choose a lot that waits for this step.' }] });
+  if (!found)
+    throw new AppError('bad_input', 'This lot has no such step.', {
+      fields: [{ field, message: 'Choose a lot that waits for this step.' }],
+    });
   return found;
 }
 
 /** Puts pieces of a lot on a batch: from now on they are reserved, and what must be proved comes from the route. */
-export async function packLine(ctx: Ctx, batch: Batch, line: NewLine, at: { lineNo: number; step: WaitingStep; prefix: string }): Promise<string> {
+export async function packLine(
+  ctx: Ctx,
+  batch: Batch,
+  line: NewLine,
+  at: { lineNo: number; step: WaitingStep; prefix: string },
+): Promise<string> {
   const { step, prefix, lineNo } = at;
   refuseOtherStep(batch, step, prefix);
   refuseMoreThanWaits(step, line.pieces, `${prefix}pieces`);
@@ -67,7 +82,18 @@ export async function packLine(ctx: Ctx, batch: Batch, line: NewLine, at: { line
     createdAt: ctx.now,
   });
   if (step.toProve.length > 0) {
-    await ctx.tx.insert(requirements).values(step.toProve.map((one, seq) => ({ id: newId(), shopId, batchId: batch.id, lineId: id, seq: seq + 1, ...one })));
+    await ctx.tx
+      .insert(requirements)
+      .values(
+        step.toProve.map((one, seq) => ({
+          id: newId(),
+          shopId,
+          batchId: batch.id,
+          lineId: id,
+          seq: seq + 1,
+          ...one,
+        })),
+      );
   }
   await movePieces(ctx, {
     lotId: line.lotId,
@@ -81,9 +107,16 @@ export async function packLine(ctx: Ctx, batch: Batch, line: NewLine, at: { line
   return id;
 }
 
-export function refuseMoreThanWaits({ lotNumber, waiting }: Pick<WaitingStep, 'lotNumber' | 'waiting'>, pieces: number, field: string): void {
+export function refuseMoreThanWaits(
+  { lotNumber, waiting }: Pick<WaitingStep, 'lotNumber' | 'waiting'>,
+  pieces: number,
+  field: string,
+): void {
   if (pieces <= waiting) return;
-  const message = waiting === 0 ? 'No piece of this lot waits for this step now.' : `The lot has ${waiting}. Enter ${waiting} or less.`;
+  const message =
+    waiting === 0
+      ? 'No piece of this lot waits for this step now.'
+      : `The lot has ${waiting}. Enter ${waiting} or less.`;
   throw new AppError('bad_input', `${lotNumber}: ${message}`, { fields: [{ field, message }] });
 }
 
@@ -97,7 +130,13 @@ async function refuseSecondLine(ctx: Ctx, batch: Batch, step: WaitingStep, prefi
   const [there] = await ctx.tx
     .select({ lineNo: batchLines.lineNo })
     .from(batchLines)
-    .where(and(eq(batchLines.batchId, batch.id), eq(batchLines.lotId, step.lotId), eq(batchLines.stepId, step.stepId)));
+    .where(
+      and(
+        eq(batchLines.batchId, batch.id),
+        eq(batchLines.lotId, step.lotId),
+        eq(batchLines.stepId, step.stepId),
+      ),
+    );
   if (!there) return;
   const message = `${step.lotNumber} is line ${there.lineNo} of ${batch.number} already. Change its pieces there.`;
   throw new AppError('bad_input', message, { fields: [{ field: `${prefix}lotId`, message }] });

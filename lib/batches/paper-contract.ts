@@ -50,7 +50,8 @@ export const reissueBatch = declare({
   id: 'reissueBatch',
   method: 'post',
   path: '/batches/{batchId}/reissue',
-  summary: 'Change day, note, prices or wording of a batch that has left; makes new versions of its papers that say what is different, and mails them',
+  summary:
+    'Change day, note, prices or wording of a batch that has left; makes new versions of its papers that say what is different, and mails them',
   side: 'shop',
   permission: 'batch.dispatch',
   input: Seen.extend({
@@ -58,9 +59,14 @@ export const reissueBatch = declare({
     note: Note.nullable().optional(),
     lotMinimumMinor: Price.optional(),
     certificationFeeMinor: Price.optional(),
-    prices: z.array(z.object({ lineId: Id, unitPriceMinor: Price })).max(200).default([]),
+    prices: z
+      .array(z.object({ lineId: Id, unitPriceMinor: Price }))
+      .max(200)
+      .default([]),
     requirements: z
-      .array(z.object({ requirementId: Id, limit: z.string().trim().max(200), unit: z.string().trim().max(24) }))
+      .array(
+        z.object({ requirementId: Id, limit: z.string().trim().max(200), unit: z.string().trim().max(24) }),
+      )
       .max(500)
       .default([]),
   }),
@@ -71,9 +77,16 @@ export const cancelBatch = declare({
   id: 'cancelBatch',
   method: 'post',
   path: '/batches/{batchId}/cancel',
-  summary: 'Cancel a batch of which nothing came back: its pieces wait for the step again, its links end, the processor is told',
+  summary:
+    'Cancel a batch of which nothing came back: its pieces wait for the step again, its links end, the processor is told',
   side: 'shop',
   permission: 'batch.dispatch',
-  input: Seen.extend({ reason: z.string().trim().min(5, 'Say why, for the processor and for the record.').max(1000, 'Keep it under 1000 letters.') }),
+  input: Seen.extend({
+    reason: z
+      .string()
+      .trim()
+      .min(5, 'Say why, for the processor and for the record.')
+      .max(1000, 'Keep it under 1000 letters.'),
+  }),
   response: BatchRef,
 });

@@ -9,10 +9,17 @@ import type { putBatchAside as declaration } from './contract';
 import { refreshStanding } from './refresh-standing';
 
 /** Puts a batch that is being built aside, or takes it up again. Its pieces stay reserved. */
-export async function putBatchAside(ctx: Ctx, { batchId, version, aside }: z.output<(typeof declaration)['input']>) {
+export async function putBatchAside(
+  ctx: Ctx,
+  { batchId, version, aside }: z.output<(typeof declaration)['input']>,
+) {
   authorize(ctx, 'batch.build');
   const batch = await changeBuilding(ctx, { batchId, version }, { putAsideAt: aside ? ctx.now : null });
-  await recordAudit(ctx, { action: aside ? 'batch.put_aside' : 'batch.take_up', entity: 'batch', entityId: batchId });
+  await recordAudit(ctx, {
+    action: aside ? 'batch.put_aside' : 'batch.take_up',
+    entity: 'batch',
+    entityId: batchId,
+  });
   await refreshStanding(ctx, batchId);
   return refOf(batch);
 }

@@ -19,7 +19,10 @@ import { readCheckFacts, readOverrides } from './read-check-facts';
 import { specificationWords } from './step-asked';
 
 /** Newest first; ids are time-ordered, so the id is the key of the page. */
-export async function listBatches(ctx: Ctx, { after, limit, stage, processorId }: z.output<(typeof declaration)['input']>) {
+export async function listBatches(
+  ctx: Ctx,
+  { after, limit, stage, processorId }: z.output<(typeof declaration)['input']>,
+) {
   authorize(ctx, 'batch.read');
   const rows = await ctx.tx
     .select({
@@ -45,26 +48,55 @@ export async function listBatches(ctx: Ctx, { after, limit, stage, processorId }
     .from(batches)
     .innerJoin(processors, eq(processors.id, batches.processorId))
     .innerJoin(shops, eq(shops.id, batches.shopId))
-    .where(and(after === undefined ? undefined : lt(batches.id, after), stage === undefined ? undefined : eq(batches.stage, stage), processorId === undefined ? undefined : eq(batches.processorId, processorId)))
+    .where(
+      and(
+        after === undefined ? undefined : lt(batches.id, after),
+        stage === undefined ? undefined : eq(batches.stage, stage),
+        processorId === undefined ? undefined : eq(batches.processorId, processorId),
+      ),
+    )
     .orderBy(desc(batches.id))
     .limit(limit + 1);
-  return toPage(rows.map((row) => ({ ...row, daysLate: lateOf(ctx, row) })), limit, (row) => row.id);
+  return toPage(
+    rows.map((row) => ({ ...row, daysLate: lateOf(ctx, row) })),
+    limit,
+    (row) => row.id,
+  );
 }
 
 export async function getBatch(ctx: Ctx, { batchId }: { batchId: string }) {
   authorize(ctx, 'batch.read');
   const [found] = await ctx.tx
-    .select({ batch: batches, processor: processors.name, contactEmail: shopProcessors.contactEmail, dispatcher: users.name, zone: shops.zone, latenessBasis: shops.latenessBasis })
+    .select({
+      batch: batches,
+      processor: processors.name,
+      contactEmail: shopProcessors.contactEmail,
+      dispatcher: users.name,
+      zone: shops.zone,
+      latenessBasis: shops.latenessBasis,
+    })
     .from(batches)
     .innerJoin(processors, eq(processors.id, batches.processorId))
-    .innerJoin(shopProcessors, and(eq(shopProcessors.shopId, batches.shopId), eq(shopProcessors.processorId, batches.processorId)))
+    .innerJoin(
+      shopProcessors,
+      and(eq(shopProcessors.shopId, batches.shopId), eq(shopProcessors.processorId, batches.processorId)),
+    )
     .innerJoin(shops, eq(shops.id, batches.shopId))
     .leftJoin(users, eq(users.id, batches.dispatchedBy))
     .where(eq(batches.id, batchId));
   if (!found) throw notFound('batch');
   const { batch, processor, contactEmail, dispatcher, zone, latenessBasis } = found;
   const { specification, specificationRevision, classType } = batch;
-  return { ...batch, step: { specification, specificationRevision, classType }, processor, contactEmail, zone, dispatchedBy: dispatcher, specification: specificationWords(batch), daysLate: lateOf(ctx, { ...batch, zone, latenessBasis }) };
+  return {
+    ...batch,
+    step: { specification, specificationRevision, classType },
+    processor,
+    contactEmail,
+    zone,
+    dispatchedBy: dispatcher,
+    specification: specificationWords(batch),
+    daysLate: lateOf(ctx, { ...batch, zone, latenessBasis }),
+  };
 }
 
 interface Promised {
@@ -79,19 +111,38 @@ interface Promised {
 }
 
 const lateOf = (ctx: Ctx, { zone, latenessBasis, lastBackAt, ...batch }: Promised): number =>
-  daysLate({ ...batch, lastBackOn: lastBackAt && calendarDay(lastBackAt, zone) }, calendarDay(ctx.now, zone), latenessBasis);
+  daysLate(
+    { ...batch, lastBackOn: lastBackAt && calendarDay(lastBackAt, zone) },
+    calendarDay(ctx.now, zone),
+    latenessBasis,
+  );
 
 /** What the checks say now, each blocker with who let it pass. */
 export async function getBatchChecks(ctx: Ctx, { batchId }: { batchId: string }) {
   authorize(ctx, 'batch.read');
   const { findings, met } = checkBatch(await readCheckFacts(ctx, batchId));
   const passed = await readOverrides(ctx, batchId);
-  const people = new Map((passed.length === 0 ? [] : await ctx.tx.select({ id: users.id, name: users.name }).from(users)).map((person) => [person.id, person.name]));
+  const people = new Map(
+    (passed.length === 0 ? [] : await ctx.tx.select({ id: users.id, name: users.name }).from(users)).map(
+      (person) => [person.id, person.name],
+    ),
+  );
   return {
     met: [...met],
     findings: findings.map(({ waysOut, ...finding }) => {
       const override = passed.find((one) => one.check === finding.code && one.subject === finding.subject);
-      return { ...finding, waysOut: [...waysOut], passed: override ? { overrideId: override.id, reason: override.reason, by: people.get(override.by) ?? 'an admin', at: override.createdAt } : null };
+      return {
+        ...finding,
+        waysOut: [...waysOut],
+        passed: override
+          ? {
+              overrideId: override.id,
+              reason: override.reason,
+              by: people.get(override.by) ?? 'an admin',
+              at: override.createdAt,
+            }
+          : null,
+      };
     }),
   };
 }
@@ -126,7 +177,10 @@ export async function getTraveller(ctx: Ctx, { batchId }: { batchId: string }) {
     .orderBy(desc(batchDocuments.documentVersion))
     .limit(1);
   const stated = last && PaperContent.parse(last.content);
-  const traveller = stated?.kind === 'traveller' ? stated : (await readPaperContents(ctx, batchId, null, { traveller: DRAFT, order: DRAFT })).traveller;
+  const traveller =
+    stated?.kind === 'traveller'
+      ? stated
+      : (await readPaperContents(ctx, batchId, null, { traveller: DRAFT, order: DRAFT })).traveller;
   const { link: _link, ...says } = traveller;
   return says;
 }

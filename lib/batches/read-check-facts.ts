@@ -13,28 +13,51 @@ import type { CheckedLine, CheckFacts } from './checks';
 /** Reads what the checks look at. */
 export async function readCheckFacts(ctx: Ctx, batchId: string): Promise<CheckFacts> {
   const [head] = await ctx.tx
-    .select({ batch: batches, zone: shops.zone, processorName: processors.name, active: shopProcessors.active })
+    .select({
+      batch: batches,
+      zone: shops.zone,
+      processorName: processors.name,
+      active: shopProcessors.active,
+    })
     .from(batches)
     .innerJoin(shops, eq(shops.id, batches.shopId))
     .innerJoin(processors, eq(processors.id, batches.processorId))
-    .innerJoin(shopProcessors, and(eq(shopProcessors.shopId, batches.shopId), eq(shopProcessors.processorId, batches.processorId)))
+    .innerJoin(
+      shopProcessors,
+      and(eq(shopProcessors.shopId, batches.shopId), eq(shopProcessors.processorId, batches.processorId)),
+    )
     .where(eq(batches.id, batchId));
   if (!head) throw notFound('batch');
   const { batch, zone } = head;
-  const [whole] = await ctx.tx.select({ count: sql<number>`count(*)::int` }).from(requirements).where(and(eq(requirements.batchId, batchId), isNull(requirements.lineId)));
+  const [whole] = await ctx.tx
+    .select({ count: sql<number>`count(*)::int` })
+    .from(requirements)
+    .where(and(eq(requirements.batchId, batchId), isNull(requirements.lineId)));
   return {
     zone,
     now: ctx.now,
     today: calendarDay(ctx.now, zone),
     batch: { ...batch, requirements: whole?.count ?? 0 },
-    processor: { id: batch.processorId, name: head.processorName, active: head.active, approvals: await readApprovals(ctx, batch.processorId) },
+    processor: {
+      id: batch.processorId,
+      name: head.processorName,
+      active: head.active,
+      approvals: await readApprovals(ctx, batch.processorId),
+    },
     lines: await readLines(ctx, batchId),
   };
 }
 
 const readApprovals = (ctx: Ctx, processorId: string) =>
   ctx.tx
-    .select({ reference: approvals.reference, processes: approvals.processes, specifications: approvals.specifications, validFrom: approvals.validFrom, validTo: approvals.validTo, withdrawnAt: approvals.withdrawnAt })
+    .select({
+      reference: approvals.reference,
+      processes: approvals.processes,
+      specifications: approvals.specifications,
+      validFrom: approvals.validFrom,
+      validTo: approvals.validTo,
+      withdrawnAt: approvals.withdrawnAt,
+    })
     .from(approvals)
     .where(eq(approvals.processorId, processorId));
 
@@ -70,7 +93,14 @@ async function readLines(ctx: Ctx, batchId: string): Promise<CheckedLine[]> {
 /** What an admin let pass on this batch, by the finding it names. */
 export const readOverrides = (ctx: Ctx, batchId: string) =>
   ctx.tx
-    .select({ id: overrides.id, check: overrides.check, subject: overrides.subject, reason: overrides.reason, by: overrides.by, createdAt: overrides.createdAt })
+    .select({
+      id: overrides.id,
+      check: overrides.check,
+      subject: overrides.subject,
+      reason: overrides.reason,
+      by: overrides.by,
+      createdAt: overrides.createdAt,
+    })
     .from(overrides)
     .where(eq(overrides.batchId, batchId))
     .orderBy(asc(overrides.createdAt), asc(overrides.id));

@@ -24,7 +24,10 @@ export async function refreshStanding(ctx: Ctx, batchId: string): Promise<void> 
       lastBackAt: facts.lastBackAt,
       openNonconformances: facts.openNonconformances,
       // Kept from the first time, so that the day of stocking does not move with a later look.
-      stockedAt: stage === 'stocked' ? sql`coalesce(${batches.stockedAt}, ${ctx.now.toISOString()}::timestamptz)` : null,
+      stockedAt:
+        stage === 'stocked'
+          ? sql`coalesce(${batches.stockedAt}, ${ctx.now.toISOString()}::timestamptz)`
+          : null,
     })
     .where(eq(batches.id, batchId));
 }

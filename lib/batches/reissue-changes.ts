@@ -8,7 +8,13 @@ export interface StatedTerms extends Clock {
   lotMinimumMinor: number;
   certificationFeeMinor: number;
   lines: readonly { id: string; lineNo: number; unitPriceMinor: number }[];
-  requirements: readonly { id: string; lineId: string | null; characteristic: string; limit: string; unit: string }[];
+  requirements: readonly {
+    id: string;
+    lineId: string | null;
+    characteristic: string;
+    limit: string;
+    unit: string;
+  }[];
 }
 
 /**
@@ -19,21 +25,33 @@ export interface StatedTerms extends Clock {
 export function reissueChanges(before: StatedTerms, after: StatedTerms): string[] {
   const day = (when: string | null) => (when === null ? 'no day' : dayWords(when, after));
   const changes: string[] = [];
-  if (before.wantedBackOn !== after.wantedBackOn) changes.push(`wanted back ${day(after.wantedBackOn)}, was ${day(before.wantedBackOn)}`);
+  if (before.wantedBackOn !== after.wantedBackOn)
+    changes.push(`wanted back ${day(after.wantedBackOn)}, was ${day(before.wantedBackOn)}`);
   for (const [at, line] of after.lines.entries()) {
     const was = before.lines[at]?.unitPriceMinor;
-    if (was !== undefined && was !== line.unitPriceMinor) changes.push(`line ${line.lineNo} at ${amountText(line.unitPriceMinor)} each, was ${amountText(was)}`);
+    if (was !== undefined && was !== line.unitPriceMinor)
+      changes.push(`line ${line.lineNo} at ${amountText(line.unitPriceMinor)} each, was ${amountText(was)}`);
   }
-  if (before.lotMinimumMinor !== after.lotMinimumMinor) changes.push(`lot minimum ${amountText(after.lotMinimumMinor)}, was ${amountText(before.lotMinimumMinor)}`);
-  if (before.certificationFeeMinor !== after.certificationFeeMinor) changes.push(`certificates ${amountText(after.certificationFeeMinor)}, was ${amountText(before.certificationFeeMinor)}`);
+  if (before.lotMinimumMinor !== after.lotMinimumMinor)
+    changes.push(
+      `lot minimum ${amountText(after.lotMinimumMinor)}, was ${amountText(before.lotMinimumMinor)}`,
+    );
+  if (before.certificationFeeMinor !== after.certificationFeeMinor)
+    changes.push(
+      `certificates ${amountText(after.certificationFeeMinor)}, was ${amountText(before.certificationFeeMinor)}`,
+    );
   for (const [at, one] of after.requirements.entries()) {
     const was = before.requirements[at];
     if (!was || (was.limit === one.limit && was.unit === one.unit)) continue;
     const lineNo = after.lines.find((line) => line.id === one.lineId)?.lineNo;
-    changes.push(`${one.characteristic}${lineNo === undefined ? '' : ` of line ${lineNo}`}: ${asks(one)}, was ${asks(was)}`);
+    changes.push(
+      `${one.characteristic}${lineNo === undefined ? '' : ` of line ${lineNo}`}: ${asks(one)}, was ${asks(was)}`,
+    );
   }
-  if ((before.note ?? '') !== (after.note ?? '')) changes.push(after.note ? `note: ${after.note}` : 'the note is taken away');
+  if ((before.note ?? '') !== (after.note ?? ''))
+    changes.push(after.note ? `note: ${after.note}` : 'the note is taken away');
   return changes;
 }
 
-const asks = ({ limit, unit }: { limit: string; unit: string }): string => [limit, unit].filter(Boolean).join(' ') || 'no limit';
+const asks = ({ limit, unit }: { limit: string; unit: string }): string =>
+  [limit, unit].filter(Boolean).join(' ') || 'no limit';

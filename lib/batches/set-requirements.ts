@@ -14,31 +14,57 @@ import type { setRequirements as declaration } from './contract';
 import { refreshStanding } from './refresh-standing';
 
 /** Replaces what must be proved for one line, or for the whole batch where no line is named. */
-export async function setRequirements(ctx: Ctx, { batchId, version, lineId, requirements: asked }: z.output<(typeof declaration)['input']>) {
+export async function setRequirements(
+  ctx: Ctx,
+  { batchId, version, lineId, requirements: asked }: z.output<(typeof declaration)['input']>,
+) {
   authorize(ctx, 'batch.build');
   const batch = await changeBuilding(ctx, { batchId, version });
   const lineNo = lineId === null ? null : await lineNoOf(ctx, batchId, lineId);
-  const these = and(eq(requirements.batchId, batchId), lineId === null ? isNull(requirements.lineId) : eq(requirements.lineId, lineId));
+  const these = and(
+    eq(requirements.batchId, batchId),
+    lineId === null ? isNull(requirements.lineId) : eq(requirements.lineId, lineId),
+  );
 
   const before = await ctx.tx
-    .select({ characteristic: requirements.characteristic, limit: requirements.limit, unit: requirements.unit, source: requirements.source, sourceText: requirements.sourceText })
+    .select({
+      characteristic: requirements.characteristic,
+      limit: requirements.limit,
+      unit: requirements.unit,
+      source: requirements.source,
+      sourceText: requirements.sourceText,
+    })
     .from(requirements)
     .where(these)
     .orderBy(asc(requirements.seq));
   await ctx.tx.delete(requirements).where(these);
   if (asked.length > 0) {
-    await ctx.tx.insert(requirements).values(asked.map((one, at) => ({ id: newId(), shopId: shopOf(ctx), batchId, lineId, seq: at + 1, ...one })));
+    await ctx.tx
+      .insert(requirements)
+      .values(
+        asked.map((one, at) => ({ id: newId(), shopId: shopOf(ctx), batchId, lineId, seq: at + 1, ...one })),
+      );
   }
-  await recordAudit(ctx, { action: 'batch.set_requirements', entity: 'batch', entityId: batchId, before: { line: lineNo, requirements: before.map(inWords) }, after: { line: lineNo, requirements: asked.map(inWords) } });
+  await recordAudit(ctx, {
+    action: 'batch.set_requirements',
+    entity: 'batch',
+    entityId: batchId,
+    before: { line: lineNo, requirements: before.map(inWords) },
+    after: { line: lineNo, requirements: asked.map(inWords) },
+  });
   await refreshStanding(ctx, batchId);
   return refOf(batch);
 }
 
 async function lineNoOf(ctx: Ctx, batchId: string, lineId: string): Promise<number> {
-  const [line] = await ctx.tx.select({ lineNo: batchLines.lineNo }).from(batchLines).where(and(eq(batchLines.id, lineId), eq(batchLines.batchId, batchId)));
+  const [line] = await ctx.tx
+    .select({ lineNo: batchLines.lineNo })
+    .from(batchLines)
+    .where(and(eq(batchLines.id, lineId), eq(batchLines.batchId, batchId)));
   if (!line) throw notFound('line');
   return line.lineNo;
 }
 
 /** One requirement as the audit trail tells it: `Hardness 63 to 83 HRB (AMS 2658)`. */
-const inWords = ({ characteristic, limit, unit, source, sourceText }: ToProve): string => `${[characteristic, limit, unit].filter(Boolean).join(' ')} (${sourceText || source})`;
+const inWords = ({ characteristic, limit, unit, source, sourceText }: ToProve): string =>
+  `${[characteristic, limit, unit].filter(Boolean).join(' ')} (${sourceText || source})`;

@@ -15,9 +15,14 @@ export const isSameStep = (one: StepAsked, other: StepAsked): boolean =>
   (one.classType ?? '') === (other.classType ?? '');
 
 /** `AMS 2770 rev R, class 2` */
-export function specificationWords({ specification, specificationRevision, classType }: Omit<StepAsked, 'process'>): string {
+export function specificationWords({
+  specification,
+  specificationRevision,
+  classType,
+}: Omit<StepAsked, 'process'>): string {
   return `${specification}${specificationRevision ? ` rev ${specificationRevision}` : ''}${classType ? `, ${classType}` : ''}`;
 }
 
 /** `solution and quench to AMS 2770 rev R` */
-export const stepWords = (step: StepAsked): string => `${PROCESS_WORDS[step.process]} to ${specificationWords(step)}`;
+export const stepWords = (step: StepAsked): string =>
+  `${PROCESS_WORDS[step.process]} to ${specificationWords(step)}`;

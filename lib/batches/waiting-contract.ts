@@ -4,7 +4,12 @@ import { declare } from '@/lib/api/endpoint';
 import { Id, Moment, PageQuery, pageOf } from '@/lib/api/shapes';
 import { PROCESSES } from '@/lib/trade/process';
 
-const Step = z.object({ process: z.enum(PROCESSES), specification: z.string(), specificationRevision: z.string().nullable(), classType: z.string().nullable() });
+const Step = z.object({
+  process: z.enum(PROCESSES),
+  specification: z.string(),
+  specificationRevision: z.string().nullable(),
+  classType: z.string().nullable(),
+});
 
 export const WaitingStep = Step.extend({ lots: z.int(), pieces: z.int(), since: Moment });
 export type WaitingStep = z.output<typeof WaitingStep>;
@@ -41,7 +46,12 @@ export const WaitingLot = z.object({
 export type WaitingLot = z.output<typeof WaitingLot>;
 
 /** Left out of a query, a part of the step means that the step has none. */
-const AskedStep = z.object({ process: z.enum(PROCESSES), specification: z.string().min(1).max(120), specificationRevision: z.string().max(40).optional(), classType: z.string().max(120).optional() });
+const AskedStep = z.object({
+  process: z.enum(PROCESSES),
+  specification: z.string().min(1).max(120),
+  specificationRevision: z.string().max(40).optional(),
+  classType: z.string().max(120).optional(),
+});
 
 export const listWaitingLots = declare({
   id: 'listWaitingLots',

@@ -12,7 +12,10 @@ import type { withdrawOverride as declaration } from './check-contract';
 import { refreshStanding } from './refresh-standing';
 
 /** The blocker stops the batch again. That it was let pass stays in the audit trail. */
-export async function withdrawOverride(ctx: Ctx, { batchId, version, overrideId }: z.output<(typeof declaration)['input']>) {
+export async function withdrawOverride(
+  ctx: Ctx,
+  { batchId, version, overrideId }: z.output<(typeof declaration)['input']>,
+) {
   authorize(ctx, 'batch.override');
   const batch = await changeBuilding(ctx, { batchId, version });
   const [gone] = await ctx.tx
@@ -20,7 +23,12 @@ export async function withdrawOverride(ctx: Ctx, { batchId, version, overrideId 
     .where(and(eq(overrides.id, overrideId), eq(overrides.batchId, batchId)))
     .returning();
   if (!gone) throw notFound('override');
-  await recordAudit(ctx, { action: 'batch.withdraw_override', entity: 'batch', entityId: batchId, before: { check: gone.check, subject: gone.subject, reason: gone.reason } });
+  await recordAudit(ctx, {
+    action: 'batch.withdraw_override',
+    entity: 'batch',
+    entityId: batchId,
+    before: { check: gone.check, subject: gone.subject, reason: gone.reason },
+  });
   await refreshStanding(ctx, batchId);
   return refOf(batch);
 }

@@ -14,10 +14,30 @@ export async function addCertificate(ctx: Ctx, { batchId, fileId }: { batchId: s
   authorize(ctx, 'certificate.add');
   const batch = await lockSentBatch(ctx, batchId, 'A certificate cannot be of it');
   const file = await requireVerifiedFile(ctx, { fileId, purpose: 'certificate', batchId: batch.id });
-  const [known] = await ctx.tx.select({ id: certificates.id }).from(certificates).where(eq(certificates.fileId, file.id));
-  if (known) throw new AppError('conflict', `${file.name} is already a certificate of ${batch.number}.`, { extra: { certificateId: known.id } });
+  const [known] = await ctx.tx
+    .select({ id: certificates.id })
+    .from(certificates)
+    .where(eq(certificates.fileId, file.id));
+  if (known)
+    throw new AppError('conflict', `${file.name} is already a certificate of ${batch.number}.`, {
+      extra: { certificateId: known.id },
+    });
   const id = newId();
-  await ctx.tx.insert(certificates).values({ id, shopId: shopOf(ctx), batchId, fileId: file.id, sentBy: ctx.actor.name, createdAt: ctx.now });
-  await recordAudit(ctx, { action: 'certificate.add', entity: 'certificate', entityId: id, after: { batchId, file: file.name, sha256: file.sha256 } });
+  await ctx.tx
+    .insert(certificates)
+    .values({
+      id,
+      shopId: shopOf(ctx),
+      batchId,
+      fileId: file.id,
+      sentBy: ctx.actor.name,
+      createdAt: ctx.now,
+    });
+  await recordAudit(ctx, {
+    action: 'certificate.add',
+    entity: 'certificate',
+    entityId: id,
+    after: { batchId, file: file.name, sha256: file.sha256 },
+  });
   return { id };
 }

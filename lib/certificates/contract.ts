@@ -13,7 +13,8 @@ export const CERTIFICATE_STATES = ['waiting', 'signed', 'set_aside'] as const;
 const State = z.enum(CERTIFICATE_STATES);
 export type CertificateState = z.output<typeof State>;
 
-const words = (name: string, most: number) => z.string().trim().max(most, `${name}: write ${most} characters or less.`);
+const words = (name: string, most: number) =>
+  z.string().trim().max(most, `${name}: write ${most} characters or less.`);
 /** As short as an override's reason may be: the processor and the auditor read it. */
 const SHORTEST_REASON = 20;
 
@@ -110,7 +111,14 @@ export const CertificateDetail = z.object({
     state: State,
     version: z.int(),
   }),
-  file: z.object({ id: Id, name: z.string(), mediaType: z.string(), size: z.int(), sha256: z.string().nullable(), verified: z.boolean() }),
+  file: z.object({
+    id: Id,
+    name: z.string(),
+    mediaType: z.string(),
+    size: z.int(),
+    sha256: z.string().nullable(),
+    verified: z.boolean(),
+  }),
   batch: z.object({
     id: Id,
     number: z.string(),
@@ -139,10 +147,26 @@ export const CertificateDetail = z.object({
       coverage: z.array(z.object({ lineNo: z.int(), partNumber: z.string(), pieces: z.int() })),
     }),
   ),
-  others: z.array(z.object({ id: Id, number: z.string().nullable(), fileName: z.string(), state: State, createdAt: Moment })),
+  others: z.array(
+    z.object({
+      id: Id,
+      number: z.string().nullable(),
+      fileName: z.string(),
+      state: State,
+      createdAt: Moment,
+    }),
+  ),
   charts: z.array(z.object({ id: Id, fileId: Id, fileName: z.string(), mediaType: z.string() })),
   /** The same file, byte for byte, sent before. */
-  sameFile: z.array(z.object({ certificateId: Id, number: z.string().nullable(), batchNumber: z.string(), sameBatch: z.boolean(), signed: z.boolean() })),
+  sameFile: z.array(
+    z.object({
+      certificateId: Id,
+      number: z.string().nullable(),
+      batchNumber: z.string(),
+      sameBatch: z.boolean(),
+      signed: z.boolean(),
+    }),
+  ),
   /** What the shop says where the reader dispatched this batch; null where somebody else did. */
   dispatchedByYou: z.enum(['refuse', 'record']).nullable(),
   /** The sentence the reader would sign. */
@@ -197,7 +221,10 @@ export const DecideRequirement = z.object({
   version: z.int().nullable(),
   stated: words('What it states', 300).default(''),
   verdict: z.enum(VERDICTS),
-  overrideReason: words('Reason', 500).min(SHORTEST_REASON, `Write ${SHORTEST_REASON} letters or more: the processor and the auditor read it.`).nullable().default(null),
+  overrideReason: words('Reason', 500)
+    .min(SHORTEST_REASON, `Write ${SHORTEST_REASON} letters or more: the processor and the auditor read it.`)
+    .nullable()
+    .default(null),
   note: words('Note', 500).default(''),
 });
 
@@ -219,7 +246,11 @@ export const setAsideCertificate = declare({
   summary: 'Set a certificate aside: a second copy, or replaced by a corrected one',
   side: 'shop',
   permission: 'certificate.prove',
-  input: z.object({ certificateId: Id, version: z.int(), reason: words('Reason', 300).min(1, 'Say why it is set aside.') }),
+  input: z.object({
+    certificateId: Id,
+    version: z.int(),
+    reason: words('Reason', 300).min(1, 'Say why it is set aside.'),
+  }),
   response: z.object({ version: z.int() }),
 });
 
@@ -237,7 +268,10 @@ export const takeUpCertificate = declare({
 export const SignCertificate = z.object({
   certificateId: Id,
   version: z.int(),
-  coverage: z.array(z.object({ lineId: Id, pieces: Pieces })).min(1, 'No pieces are covered yet. Enter how many on each line.').max(500),
+  coverage: z
+    .array(z.object({ lineId: Id, pieces: Pieces }))
+    .min(1, 'No pieces are covered yet. Enter how many on each line.')
+    .max(500),
   /** The decisions as the signer saw them, so that nobody signs what changed under their eyes. */
   decisions: z.array(z.object({ requirementId: Id, version: z.int() })).max(1000),
   password: z.string().min(1, 'Enter your password.').max(200),
@@ -253,4 +287,3 @@ export const signCertificate = declare({
   input: SignCertificate,
   response: z.object({ signatureId: Id, seal: z.string(), pieces: z.int() }),
 });
-

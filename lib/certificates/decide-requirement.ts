@@ -24,7 +24,11 @@ export async function decideRequirement(ctx: Ctx, input: Input) {
     .from(requirements)
     .where(and(eq(requirements.id, input.requirementId), eq(requirements.batchId, locked.batch.id)));
   if (!requirement) throw notFound('requirement');
-  if (isSealed(requirement, await signedLinesOf(ctx, input.certificateId))) throw new AppError('conflict', `${requirement.characteristic} is sealed by a signature on this certificate. It stays as it was signed.`);
+  if (isSealed(requirement, await signedLinesOf(ctx, input.certificateId)))
+    throw new AppError(
+      'conflict',
+      `${requirement.characteristic} is sealed by a signature on this certificate. It stays as it was signed.`,
+    );
 
   const before = await existing(ctx, input);
   if ((before?.version ?? null) !== input.version) throw changedMeanwhile('decision');
@@ -39,29 +43,60 @@ export async function decideRequirement(ctx: Ctx, input: Input) {
     version: (before?.version ?? 0) + 1,
   };
   if (before) await ctx.tx.update(decisions).set(values).where(eq(decisions.id, before.id));
-  else await ctx.tx.insert(decisions).values({ ...values, shopId: shopOf(ctx), certificateId: input.certificateId, requirementId: input.requirementId });
+  else
+    await ctx.tx
+      .insert(decisions)
+      .values({
+        ...values,
+        shopId: shopOf(ctx),
+        certificateId: input.certificateId,
+        requirementId: input.requirementId,
+      });
   await recordAudit(ctx, {
     action: values.overrideReason === null ? 'certificate.decide' : 'certificate.override',
     entity: 'certificate',
     entityId: input.certificateId,
-    ...(before ? { before: { requirement: requirement.characteristic, stated: before.stated, verdict: before.verdict, overrideReason: before.overrideReason } } : {}),
-    after: { requirement: requirement.characteristic, stated: values.stated, verdict: values.verdict, overrideReason: values.overrideReason },
+    ...(before
+      ? {
+          before: {
+            requirement: requirement.characteristic,
+            stated: before.stated,
+            verdict: before.verdict,
+            overrideReason: before.overrideReason,
+          },
+        }
+      : {}),
+    after: {
+      requirement: requirement.characteristic,
+      stated: values.stated,
+      verdict: values.verdict,
+      overrideReason: values.overrideReason,
+    },
   });
   return { version: values.version };
 }
 
 async function existing(ctx: Ctx, { certificateId, requirementId }: Input) {
-  const [row] = await ctx.tx.select().from(decisions).where(and(eq(decisions.certificateId, certificateId), eq(decisions.requirementId, requirementId)));
+  const [row] = await ctx.tx
+    .select()
+    .from(decisions)
+    .where(and(eq(decisions.certificateId, certificateId), eq(decisions.requirementId, requirementId)));
   return row;
 }
 
 /** The signatures on a certificate, each with the lines it covers. */
-export async function signedLinesOf(ctx: Pick<Ctx, 'tx'>, certificateId: string): Promise<{ signatureId: string; lineIds: string[] }[]> {
+export async function signedLinesOf(
+  ctx: Pick<Ctx, 'tx'>,
+  certificateId: string,
+): Promise<{ signatureId: string; lineIds: string[] }[]> {
   const rows = await ctx.tx
     .select({ signatureId: signatures.id, lineId: coverage.lineId })
     .from(signatures)
     .innerJoin(coverage, eq(coverage.signatureId, signatures.id))
     .where(eq(signatures.certificateId, certificateId));
   const ids = [...new Set(rows.map((row) => row.signatureId))];
-  return ids.map((signatureId) => ({ signatureId, lineIds: rows.filter((row) => row.signatureId === signatureId).map((row) => row.lineId) }));
+  return ids.map((signatureId) => ({
+    signatureId,
+    lineIds: rows.filter((row) => row.signatureId === signatureId).map((row) => row.lineId),
+  }));
 }

@@ -18,4 +18,7 @@ export const recordCertificateEndpoint = endpoint(contract.recordCertificate, re
 export const decideRequirementEndpoint = endpoint(contract.decideRequirement, decideRequirement);
 export const setAsideCertificateEndpoint = endpoint(contract.setAsideCertificate, setAsideCertificate);
 export const takeUpCertificateEndpoint = endpoint(contract.takeUpCertificate, takeUpCertificate);
-export const signCertificateEndpoint = endpointInSteps(contract.signCertificate, { outside: tryPasswordAgain, run: signCertificate });
+export const signCertificateEndpoint = endpointInSteps(contract.signCertificate, {
+  outside: tryPasswordAgain,
+  run: signCertificate,
+});

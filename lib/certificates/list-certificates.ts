@@ -15,7 +15,10 @@ import type { listCertificates as declaration } from './contract';
 const isDone = sql<boolean>`(${certificateState} <> 'waiting')`;
 
 /** What waits to be proved first. The key of a page says in which of the two halves it ended. */
-export async function listCertificates(ctx: Ctx, { after, limit, batchId, state }: z.output<(typeof declaration)['input']>) {
+export async function listCertificates(
+  ctx: Ctx,
+  { after, limit, batchId, state }: z.output<(typeof declaration)['input']>,
+) {
   authorize(ctx, 'certificate.read');
   const rows = await ctx.tx
     .select({
@@ -42,7 +45,13 @@ export async function listCertificates(ctx: Ctx, { after, limit, batchId, state 
     .innerJoin(files, eq(files.id, certificates.fileId))
     .innerJoin(batches, eq(batches.id, certificates.batchId))
     .innerJoin(processors, eq(processors.id, batches.processorId))
-    .where(and(batchId === undefined ? undefined : eq(certificates.batchId, batchId), state === undefined ? undefined : sql`${certificateState} = ${state}`, after === undefined ? undefined : isAfter(after)))
+    .where(
+      and(
+        batchId === undefined ? undefined : eq(certificates.batchId, batchId),
+        state === undefined ? undefined : sql`${certificateState} = ${state}`,
+        after === undefined ? undefined : isAfter(after),
+      ),
+    )
     .orderBy(isDone, sql`${certificates.id} desc`)
     .limit(limit + 1);
   return toPage(rows, limit, (row) => `${row.state === 'waiting' ? 'waiting' : 'done'}.${row.id}`);
@@ -51,5 +60,7 @@ export async function listCertificates(ctx: Ctx, { after, limit, batchId, state 
 function isAfter(key: string): SQL {
   const [half, id] = key.split('.');
   if (id === undefined || !/^[0-9a-f-]{36}$/.test(id)) return sql`false`;
-  return half === 'waiting' ? sql`(${isDone} or ${certificates.id} < ${id})` : sql`(${isDone} and ${certificates.id} < ${id})`;
+  return half === 'waiting'
+    ? sql`(${isDone} or ${certificates.id} < ${id})`
+    : sql`(${isDone} and ${certificates.id} < ${id})`;
 }

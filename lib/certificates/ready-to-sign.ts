@@ -22,13 +22,17 @@ export interface Readiness {
 }
 
 /** Accepted: it meets, or a person accepted it against its verdict and said why. */
-export const isAccepted = (decision: { verdict: Verdict; overrideReason: string | null }): boolean => decision.verdict === 'meets' || decision.overrideReason !== null;
+export const isAccepted = (decision: { verdict: Verdict; overrideReason: string | null }): boolean =>
+  decision.verdict === 'meets' || decision.overrideReason !== null;
 
 /**
  * Whether a certificate can be signed for these lines. What concerns only a line that is not covered now may wait:
  * another certificate, or a later signature, speaks for it.
  */
-export function readinessOf(requirements: readonly JudgedRequirement[], coverage: readonly { lineId: string; pieces: number }[]): Readiness {
+export function readinessOf(
+  requirements: readonly JudgedRequirement[],
+  coverage: readonly { lineId: string; pieces: number }[],
+): Readiness {
   const covered = new Set(coverage.filter((line) => line.pieces > 0).map((line) => line.lineId));
   const pieces = coverage.reduce((sum, line) => sum + line.pieces, 0);
   const bearing = requirements.filter((one) => one.lineId === null || covered.has(one.lineId));
@@ -36,12 +40,28 @@ export function readinessOf(requirements: readonly JudgedRequirement[], coverage
   const against = bearing.filter((one) => one.decision !== null && !isAccepted(one.decision));
   const why = whyNot({ pieces, undecided, against });
   const ids = (some: readonly JudgedRequirement[]) => some.map((one) => one.requirementId);
-  return { bearing: ids(bearing), undecided: ids(undecided), against: ids(against), pieces, ready: why === null, why };
+  return {
+    bearing: ids(bearing),
+    undecided: ids(undecided),
+    against: ids(against),
+    pieces,
+    ready: why === null,
+    why,
+  };
 }
 
-function whyNot({ pieces, undecided, against }: { pieces: number; undecided: readonly JudgedRequirement[]; against: readonly JudgedRequirement[] }): string | null {
+function whyNot({
+  pieces,
+  undecided,
+  against,
+}: {
+  pieces: number;
+  undecided: readonly JudgedRequirement[];
+  against: readonly JudgedRequirement[];
+}): string | null {
   if (undecided.length > 0) return `${undecided.length} to decide before you sign: ${named(undecided)}.`;
-  if (against.length > 0) return `${named(against)} ${against.length === 1 ? 'is' : 'are'} not met. Override with a reason, hold the pieces, or ask for a corrected certificate.`;
+  if (against.length > 0)
+    return `${named(against)} ${against.length === 1 ? 'is' : 'are'} not met. Override with a reason, hold the pieces, or ask for a corrected certificate.`;
   if (pieces === 0) return 'No pieces are covered yet. Enter how many on each line.';
   return null;
 }

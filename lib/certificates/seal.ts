@@ -21,7 +21,14 @@ export interface Sealed {
     decidedBy: string;
     decidedAt: string;
   }[];
-  coverage: { lineId: string; lineNo: number; partNumber: string; partRevision: string; lotNumber: string; pieces: number }[];
+  coverage: {
+    lineId: string;
+    lineNo: number;
+    partNumber: string;
+    partRevision: string;
+    lotNumber: string;
+    pieces: number;
+  }[];
   held: { number: string; lineNo: number; pieces: number }[];
   sentence: string;
   dispatchedBySigner: boolean;

@@ -60,28 +60,89 @@ export async function signCertificate(ctx: Ctx, input: Input) {
   };
   const { sealed, seal } = sealUp(content);
   const shopId = shopOf(ctx);
-  await ctx.tx.insert(signatures).values({ id, shopId, certificateId: certificate.id, batchId: batch.id, sentence, fileSha256: file.sha256, sealed, seal, signedBy: signer.id, signerName: signer.name, signedAt: ctx.now });
-  await ctx.tx.insert(coverage).values(input.coverage.map(({ lineId, pieces }) => ({ shopId, signatureId: id, certificateId: certificate.id, lineId, pieces })));
+  await ctx.tx
+    .insert(signatures)
+    .values({
+      id,
+      shopId,
+      certificateId: certificate.id,
+      batchId: batch.id,
+      sentence,
+      fileSha256: file.sha256,
+      sealed,
+      seal,
+      signedBy: signer.id,
+      signerName: signer.name,
+      signedAt: ctx.now,
+    });
+  await ctx.tx
+    .insert(coverage)
+    .values(
+      input.coverage.map(({ lineId, pieces }) => ({
+        shopId,
+        signatureId: id,
+        certificateId: certificate.id,
+        lineId,
+        pieces,
+      })),
+    );
   const pieces = input.coverage.reduce((sum, line) => sum + line.pieces, 0);
-  await recordAudit(ctx, { action: 'certificate.sign', entity: 'certificate', entityId: certificate.id, after: { signatureId: id, batch: batch.number, pieces, coverage: content.coverage, fileSha256: file.sha256, seal, dispatchedBySigner } });
+  await recordAudit(ctx, {
+    action: 'certificate.sign',
+    entity: 'certificate',
+    entityId: certificate.id,
+    after: {
+      signatureId: id,
+      batch: batch.number,
+      pieces,
+      coverage: content.coverage,
+      fileSha256: file.sha256,
+      seal,
+      dispatchedBySigner,
+    },
+  });
   await refreshStanding(ctx, batch.id);
   return { signatureId: id, seal, pieces };
 }
 
 /** Dispatch and acceptance ought to be two people's; a shop of two may let one do both, on the record. */
 async function refuseSameHands(ctx: Ctx, number: string): Promise<void> {
-  const [shop] = await ctx.tx.select({ policy: shops.dispatchAndAcceptance }).from(shops).where(eq(shops.id, shopOf(ctx)));
-  if (shop?.policy !== 'record') throw new AppError('not_allowed', `You dispatched ${number} yourself. In this shop another person accepts its certificates. An admin can change that in the settings.`);
+  const [shop] = await ctx.tx
+    .select({ policy: shops.dispatchAndAcceptance })
+    .from(shops)
+    .where(eq(shops.id, shopOf(ctx)));
+  if (shop?.policy !== 'record')
+    throw new AppError(
+      'not_allowed',
+      `You dispatched ${number} yourself. In this shop another person accepts its certificates. An admin can change that in the settings.`,
+    );
 }
 
-function namedOf({ number, datedOn }: { number: string | null; datedOn: string | null }): { number: string; datedOn: string } {
+function namedOf({ number, datedOn }: { number: string | null; datedOn: string | null }): {
+  number: string;
+  datedOn: string;
+} {
   if (number !== null && datedOn !== null) return { number, datedOn };
-  throw new AppError('conflict', "Enter the certificate's number and date as printed, then sign.", { fields: [{ field: number === null ? 'number' : 'datedOn', message: number === null ? 'Enter the number as printed.' : 'Enter the date as printed.' }] });
+  throw new AppError('conflict', "Enter the certificate's number and date as printed, then sign.", {
+    fields: [
+      {
+        field: number === null ? 'number' : 'datedOn',
+        message: number === null ? 'Enter the number as printed.' : 'Enter the date as printed.',
+      },
+    ],
+  });
 }
 
 async function wholeFileOf(ctx: Ctx, fileId: string): Promise<{ sha256: string }> {
-  const [file] = await ctx.tx.select({ name: files.name, state: files.state, sha256: files.sha256 }).from(files).where(eq(files.id, fileId));
-  if (file?.state !== 'verified' || file.sha256 === null) throw new AppError('conflict', `${file?.name ?? 'The file'} did not arrive whole, so nobody can sign for it. Ask for it again.`);
+  const [file] = await ctx.tx
+    .select({ name: files.name, state: files.state, sha256: files.sha256 })
+    .from(files)
+    .where(eq(files.id, fileId));
+  if (file?.state !== 'verified' || file.sha256 === null)
+    throw new AppError(
+      'conflict',
+      `${file?.name ?? 'The file'} did not arrive whole, so nobody can sign for it. Ask for it again.`,
+    );
   return { sha256: file.sha256 };
 }
 
@@ -94,10 +155,21 @@ function refuseFaults({ coverage: asked }: Input, lines: readonly LineStanding[]
 /** Every decision that bears on the covered lines, as the signer saw them. */
 async function decidedFor(ctx: Ctx, input: Input, batchId: string): Promise<Sealed['decisions']> {
   const rows = await ctx.tx
-    .select({ requirementId: requirements.id, lineId: requirements.lineId, lineNo: batchLines.lineNo, characteristic: requirements.characteristic, limit: requirements.limit, unit: requirements.unit, decision: decisions })
+    .select({
+      requirementId: requirements.id,
+      lineId: requirements.lineId,
+      lineNo: batchLines.lineNo,
+      characteristic: requirements.characteristic,
+      limit: requirements.limit,
+      unit: requirements.unit,
+      decision: decisions,
+    })
     .from(requirements)
     .leftJoin(batchLines, eq(batchLines.id, requirements.lineId))
-    .leftJoin(decisions, and(eq(decisions.requirementId, requirements.id), eq(decisions.certificateId, input.certificateId)))
+    .leftJoin(
+      decisions,
+      and(eq(decisions.requirementId, requirements.id), eq(decisions.certificateId, input.certificateId)),
+    )
     .where(eq(requirements.batchId, batchId))
     .orderBy(sql`${batchLines.lineNo} nulls first`, asc(requirements.seq), asc(requirements.id));
   const readiness = readinessOf(rows, input.coverage);
@@ -107,9 +179,18 @@ async function decidedFor(ctx: Ctx, input: Input, batchId: string): Promise<Seal
   return bearing.map(({ decision, lineId: _line, ...requirement }) => {
     if (!decision) throw new Error('an undecided requirement passed as ready');
     const seen = input.decisions.find((one) => one.requirementId === requirement.requirementId);
-    if (seen?.version !== decision.version) throw changedMeanwhile(`decision about ${requirement.characteristic}`);
+    if (seen?.version !== decision.version)
+      throw changedMeanwhile(`decision about ${requirement.characteristic}`);
     const { stated, verdict, overrideReason, note, decidedBy, decidedAt } = decision;
-    return { ...requirement, stated, verdict, overrideReason, note, decidedBy, decidedAt: decidedAt.toISOString() };
+    return {
+      ...requirement,
+      stated,
+      verdict,
+      overrideReason,
+      note,
+      decidedBy,
+      decidedAt: decidedAt.toISOString(),
+    };
   });
 }
 
@@ -126,7 +207,14 @@ async function heldNow(ctx: Ctx, batchId: string): Promise<Sealed['held']> {
     .select({ number: nonconformances.number, lineNo: batchLines.lineNo, pieces: balances.pieces })
     .from(nonconformances)
     .innerJoin(batchLines, eq(batchLines.id, nonconformances.lineId))
-    .innerJoin(balances, and(eq(balances.lotId, nonconformances.lotId), eq(balances.place, 'hold'), eq(balances.holderId, nonconformances.id)))
+    .innerJoin(
+      balances,
+      and(
+        eq(balances.lotId, nonconformances.lotId),
+        eq(balances.place, 'hold'),
+        eq(balances.holderId, nonconformances.id),
+      ),
+    )
     .where(and(eq(nonconformances.batchId, batchId), sql`${balances.pieces} > 0`))
     .orderBy(asc(nonconformances.number));
 }

@@ -1,3 +1,6 @@
 import { z } from 'zod';
 
-export const assembleDossierQueue = { name: 'assemble-dossier', payload: z.object({ shopId: z.uuid(), dossierId: z.uuid() }) };
+export const assembleDossierQueue = {
+  name: 'assemble-dossier',
+  payload: z.object({ shopId: z.uuid(), dossierId: z.uuid() }),
+};

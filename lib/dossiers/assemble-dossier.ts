@@ -24,7 +24,10 @@ export async function assembleDossier(tools: JobTools, payload: Payload): Promis
     await make(tools, payload);
   } catch (error) {
     await tools.inShop(payload.shopId, (ctx) =>
-      ctx.tx.update(dossiers).set({ failure: failureWords(error) }).where(and(eq(dossiers.id, payload.dossierId), isNull(dossiers.finishedAt))),
+      ctx.tx
+        .update(dossiers)
+        .set({ failure: failureWords(error) })
+        .where(and(eq(dossiers.id, payload.dossierId), isNull(dossiers.finishedAt))),
     );
     throw error;
   }
@@ -38,23 +41,49 @@ function failureWords(error: unknown): string {
 
 async function make(tools: JobTools, { shopId, dossierId }: Payload): Promise<void> {
   const asked = await tools.inShop(shopId, async (ctx) => {
-    const [dossier] = await ctx.tx.select().from(dossiers).where(and(eq(dossiers.id, dossierId), isNull(dossiers.finishedAt)));
+    const [dossier] = await ctx.tx
+      .select()
+      .from(dossiers)
+      .where(and(eq(dossiers.id, dossierId), isNull(dossiers.finishedAt)));
     return dossier ? { dossier, content: await readDossier(ctx, dossier.lotId) } : null;
   });
   if (!asked) return;
   const { dossier, content } = asked;
   const name = `${content.lot.number} ${content.part.number} rev ${content.part.revision}`;
   const document = await renderDossier(content, dossier.statedAt);
-  const archive = await makeArchive({ content, document, statedAt: dossier.statedAt, open: async (file) => (await getObject(file.storageKey)).body });
+  const archive = await makeArchive({
+    content,
+    document,
+    statedAt: dossier.statedAt,
+    open: async (file) => (await getObject(file.storageKey)).body,
+  });
   const stored = { shopId, batchId: null };
-  const pdf = await storeMadeFile(tools, { ...stored, purpose: 'dossier', name: `${name} dossier.pdf`, mediaType: 'application/pdf', content: document });
-  const zip = await storeMadeFile(tools, { ...stored, purpose: 'archive', name: `${name} dossier.zip`, mediaType: 'application/zip', content: archive });
+  const pdf = await storeMadeFile(tools, {
+    ...stored,
+    purpose: 'dossier',
+    name: `${name} dossier.pdf`,
+    mediaType: 'application/pdf',
+    content: document,
+  });
+  const zip = await storeMadeFile(tools, {
+    ...stored,
+    purpose: 'archive',
+    name: `${name} dossier.zip`,
+    mediaType: 'application/zip',
+    content: archive,
+  });
   await tools.inShop(shopId, async (ctx) => {
     const [finished] = await ctx.tx
       .update(dossiers)
       .set({ documentFileId: pdf.fileId, archiveFileId: zip.fileId, finishedAt: ctx.now, failure: null })
       .where(and(eq(dossiers.id, dossierId), isNull(dossiers.finishedAt)))
       .returning({ id: dossiers.id });
-    if (finished) await recordAudit(ctx, { action: 'dossier.make', entity: 'lot', entityId: dossier.lotId, after: { documentSha256: pdf.sha256, archiveSha256: zip.sha256 } });
+    if (finished)
+      await recordAudit(ctx, {
+        action: 'dossier.make',
+        entity: 'lot',
+        entityId: dossier.lotId,
+        after: { documentSha256: pdf.sha256, archiveSha256: zip.sha256 },
+      });
   });
 }

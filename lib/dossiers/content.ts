@@ -1,8 +1,24 @@
 /** All that a dossier says of one lot. Plain values, so that the page, the document and the archive say the same. */
 export interface DossierContent {
   shop: { name: string; address: string[]; zone: string };
-  lot: { id: string; number: string; heat: string; madeOn: string; serialised: boolean; made: number; serials: string[] };
-  part: { number: string; revision: string; name: string; material: string; thickness: string | null; madeCondition: string; endCondition: string };
+  lot: {
+    id: string;
+    number: string;
+    heat: string;
+    madeOn: string;
+    serialised: boolean;
+    made: number;
+    serials: string[];
+  };
+  part: {
+    number: string;
+    revision: string;
+    name: string;
+    material: string;
+    thickness: string | null;
+    madeCondition: string;
+    endCondition: string;
+  };
   route: { seq: number; process: string; specification: string; targetCondition: string | null }[];
   whereabouts: { place: string; holder: string; pieces: number }[];
   batches: DossierBatch[];
@@ -30,9 +46,40 @@ export interface DossierBatch {
   dispatchedBy: string | null;
   overrides: { check: string; reason: string; by: string }[];
   receipts: { at: string; by: string; good: number; damaged: number; short: number; over: number }[];
-  requirements: { characteristic: string; limit: string; decisions: { certificate: string; stated: string; verdict: string; overrideReason: string | null; by: string }[] }[];
-  signatures: { certificate: string; pieces: number; signer: string; at: string; sentence: string; seal: string; fileSha256: string }[];
-  nonconformances: { number: string; kind: string; what: string; pieces: number; dispositions: { disposition: string; pieces: number; reason: string; authority: string | null; by: string; at: string }[] }[];
+  requirements: {
+    characteristic: string;
+    limit: string;
+    decisions: {
+      certificate: string;
+      stated: string;
+      verdict: string;
+      overrideReason: string | null;
+      by: string;
+    }[];
+  }[];
+  signatures: {
+    certificate: string;
+    pieces: number;
+    signer: string;
+    at: string;
+    sentence: string;
+    seal: string;
+    fileSha256: string;
+  }[];
+  nonconformances: {
+    number: string;
+    kind: string;
+    what: string;
+    pieces: number;
+    dispositions: {
+      disposition: string;
+      pieces: number;
+      reason: string;
+      authority: string | null;
+      by: string;
+      at: string;
+    }[];
+  }[];
   releases: { at: string; by: string; pieces: number; to: string }[];
 }
 

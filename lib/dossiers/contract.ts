@@ -9,7 +9,15 @@ import type { DossierContent, DossierFile } from './content';
 export type DossierEvidence = Omit<DossierContent, 'files'> & { files: Omit<DossierFile, 'storageKey'>[] };
 const Evidence = z.custom<DossierEvidence>();
 
-export const DossierMade = z.object({ id: Id, statedAt: Moment, requestedBy: z.string(), finished: z.boolean(), /** Why the last try did not make it; it may still be tried again. */ failure: z.string().nullable(), documentFileId: Id.nullable(), archiveFileId: Id.nullable() });
+export const DossierMade = z.object({
+  id: Id,
+  statedAt: Moment,
+  requestedBy: z.string(),
+  finished: z.boolean(),
+  /** Why the last try did not make it; it may still be tried again. */ failure: z.string().nullable(),
+  documentFileId: Id.nullable(),
+  archiveFileId: Id.nullable(),
+});
 export type DossierMade = z.output<typeof DossierMade>;
 
 export const getDossier = declare({
@@ -22,7 +30,16 @@ export const getDossier = declare({
   input: z.object({ lotId: Id }),
   response: z.object({
     evidence: Evidence,
-    links: z.array(z.object({ id: Id, forWhom: z.string(), expiresAt: Moment, withdrawnAt: Moment.nullable(), createdBy: z.string(), createdAt: Moment })),
+    links: z.array(
+      z.object({
+        id: Id,
+        forWhom: z.string(),
+        expiresAt: Moment,
+        withdrawnAt: Moment.nullable(),
+        createdBy: z.string(),
+        createdAt: Moment,
+      }),
+    ),
   }),
 });
 
@@ -55,7 +72,11 @@ export const shareDossier = declare({
   summary: 'A read-only link to a dossier for somebody outside; the address is told once',
   side: 'shop',
   permission: 'dossier.share',
-  input: z.object({ lotId: Id, forWhom: z.string().trim().min(2, 'Say for whom it is.').max(120), days: z.int().min(1, 'At least 1 day.').max(366, 'At most 366 days.') }),
+  input: z.object({
+    lotId: Id,
+    forWhom: z.string().trim().min(2, 'Say for whom it is.').max(120),
+    days: z.int().min(1, 'At least 1 day.').max(366, 'At most 366 days.'),
+  }),
   response: z.object({ id: Id, url: z.string() }),
 });
 
@@ -80,7 +101,13 @@ export const readDossierLink = declare({
   side: 'public',
   permission: 'public.use',
   input: z.object({ token: z.string().max(400) }),
-  response: z.object({ state: z.enum(['open', 'ended', 'withdrawn', 'unknown']), shop: z.string().nullable(), phone: z.string().nullable(), zone: z.string().nullable(), endedAt: Moment.nullable() }),
+  response: z.object({
+    state: z.enum(['open', 'ended', 'withdrawn', 'unknown']),
+    shop: z.string().nullable(),
+    phone: z.string().nullable(),
+    zone: z.string().nullable(),
+    endedAt: Moment.nullable(),
+  }),
 });
 export type DossierLinkFace = z.output<(typeof readDossierLink)['response']>;
 
@@ -92,7 +119,12 @@ export const openDossierLink = declare({
   side: 'public',
   permission: 'public.use',
   input: z.object({ token: Token }),
-  response: z.object({ forWhom: z.string(), expiresAt: Moment, evidence: Evidence, made: DossierMade.nullable() }),
+  response: z.object({
+    forWhom: z.string(),
+    expiresAt: Moment,
+    evidence: Evidence,
+    made: DossierMade.nullable(),
+  }),
 });
 
 export const readSharedFile = declare({

@@ -13,4 +13,7 @@ export const shareDossierEndpoint = endpoint(contract.shareDossier, shareDossier
 export const withdrawDossierLinkEndpoint = endpoint(contract.withdrawDossierLink, withdrawDossierLink);
 export const readDossierLinkEndpoint = endpoint(contract.readDossierLink, readDossierLink);
 export const openDossierLinkEndpoint = endpoint(contract.openDossierLink, openDossierLink);
-export const readSharedFileEndpoint = endpointInSteps(contract.readSharedFile, { outside: openSharedFile, run: readSharedFile });
+export const readSharedFileEndpoint = endpointInSteps(contract.readSharedFile, {
+  outside: openSharedFile,
+  run: readSharedFile,
+});

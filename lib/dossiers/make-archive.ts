@@ -16,7 +16,9 @@ interface Archive {
 /** Somebody has been at the storage. */
 export class ChangedOriginal extends Error {
   constructor(name: string) {
-    super(`The original ${name} no longer has its hash: the bytes in storage are not those that were kept. No dossier was made.`);
+    super(
+      `The original ${name} no longer has its hash: the bytes in storage are not those that were kept. No dossier was made.`,
+    );
     this.name = 'ChangedOriginal';
   }
 }
@@ -38,26 +40,47 @@ export async function makeArchive({ content, document, statedAt, open }: Archive
   };
 
   add('dossier.pdf', document, 'The dossier as one document');
-  add('dossier.json', Buffer.from(`${JSON.stringify(withoutKeys(content), null, 2)}\n`), 'All that the dossier says, as data');
+  add(
+    'dossier.json',
+    Buffer.from(`${JSON.stringify(withoutKeys(content), null, 2)}\n`),
+    'All that the dossier says, as data',
+  );
   const taken = new Set<string>();
   for (const file of content.files) {
     const original = await buffer(await open(file));
     if (sha256Of(original) !== file.sha256) throw new ChangedOriginal(file.name);
-    add(uniquePath(file, taken), original, `${file.purpose.replaceAll('_', ' ')}${file.batchNumber ? ` of ${file.batchNumber}` : ''}, as received`);
+    add(
+      uniquePath(file, taken),
+      original,
+      `${file.purpose.replaceAll('_', ' ')}${file.batchNumber ? ` of ${file.batchNumber}` : ''}, as received`,
+    );
   }
-  const manifest = Buffer.from(`${JSON.stringify({ lot: content.lot.number, shop: content.shop.name, stated: statedAt.toISOString(), auditHead: content.auditHead, files: sums }, null, 2)}\n`);
+  const manifest = Buffer.from(
+    `${JSON.stringify({ lot: content.lot.number, shop: content.shop.name, stated: statedAt.toISOString(), auditHead: content.auditHead, files: sums }, null, 2)}\n`,
+  );
   add('manifest.json', manifest, 'What each file is, with its hash');
-  zip.append(sums.map(({ path, sha256 }) => `${sha256}  ${path}\n`).join(''), { name: 'SHA256SUMS', date: statedAt });
+  zip.append(sums.map(({ path, sha256 }) => `${sha256}  ${path}\n`).join(''), {
+    name: 'SHA256SUMS',
+    date: statedAt,
+  });
   await zip.finalize();
   return bytes;
 }
 
 /** Where bytes lie in our storage is nobody's business outside. */
-const withoutKeys = (content: DossierContent) => ({ ...content, files: content.files.map(({ storageKey: _, ...file }) => file) });
+const withoutKeys = (content: DossierContent) => ({
+  ...content,
+  files: content.files.map(({ storageKey: _, ...file }) => file),
+});
 
 /** A path that every unpacking program can make: the file's own name, freed of what paths and consoles read as commands. */
 function uniquePath(file: DossierFile, taken: Set<string>): string {
-  const safe = file.name.normalize('NFC').replace(/[^\p{L}\p{N}. _()-]/gu, '_').replace(/^\.+/, '').slice(-100) || 'file';
+  const safe =
+    file.name
+      .normalize('NFC')
+      .replace(/[^\p{L}\p{N}. _()-]/gu, '_')
+      .replace(/^\.+/, '')
+      .slice(-100) || 'file';
   const folder = file.batchNumber === null ? 'originals' : `originals/${file.batchNumber}`;
   let path = `${folder}/${safe}`;
   if (taken.has(path.toLowerCase())) path = `${folder}/${file.id.slice(-8)} ${safe}`;

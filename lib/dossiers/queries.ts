@@ -17,7 +17,14 @@ const MOST_SHOWN = 10;
 export async function getDossier(ctx: Ctx, { lotId }: { lotId: string }) {
   authorize(ctx, 'dossier.read');
   const links = await ctx.tx
-    .select({ id: dossierLinks.id, forWhom: dossierLinks.forWhom, expiresAt: dossierLinks.expiresAt, withdrawnAt: dossierLinks.withdrawnAt, createdBy: dossierLinks.createdBy, createdAt: dossierLinks.createdAt })
+    .select({
+      id: dossierLinks.id,
+      forWhom: dossierLinks.forWhom,
+      expiresAt: dossierLinks.expiresAt,
+      withdrawnAt: dossierLinks.withdrawnAt,
+      createdBy: dossierLinks.createdBy,
+      createdAt: dossierLinks.createdAt,
+    })
     .from(dossierLinks)
     .where(eq(dossierLinks.lotId, lotId))
     .orderBy(desc(dossierLinks.id));
@@ -34,9 +41,16 @@ export async function requestDossier(ctx: Ctx, { lotId }: { lotId: string }) {
   authorize(ctx, 'dossier.read');
   const { lot } = await readDossier(ctx, lotId);
   const id = newId();
-  await ctx.tx.insert(dossiers).values({ id, shopId: shopOf(ctx), lotId, statedAt: ctx.now, requestedBy: ctx.actor.name });
+  await ctx.tx
+    .insert(dossiers)
+    .values({ id, shopId: shopOf(ctx), lotId, statedAt: ctx.now, requestedBy: ctx.actor.name });
   await enqueue(ctx, assembleDossierQueue, { shopId: shopOf(ctx), dossierId: id });
-  await recordAudit(ctx, { action: 'dossier.request', entity: 'lot', entityId: lotId, after: { lot: lot.number } });
+  await recordAudit(ctx, {
+    action: 'dossier.request',
+    entity: 'lot',
+    entityId: lotId,
+    after: { lot: lot.number },
+  });
   return { id };
 }
 
@@ -44,13 +58,26 @@ export async function openDossierLink(ctx: Ctx, { token }: { token: string }) {
   authorize(ctx, 'public.use');
   return throughDossierLink(ctx, token, async (inner, { lotId, forWhom, expiresAt }) => {
     const made = await readMade(inner, lotId);
-    return { forWhom, expiresAt, evidence: withoutKeys(await readDossier(inner, lotId)), made: made.find((one) => one.finished) ?? null };
+    return {
+      forWhom,
+      expiresAt,
+      evidence: withoutKeys(await readDossier(inner, lotId)),
+      made: made.find((one) => one.finished) ?? null,
+    };
   });
 }
 
 async function readMade(ctx: Pick<Ctx, 'tx'>, lotId: string) {
   const rows = await ctx.tx
-    .select({ id: dossiers.id, statedAt: dossiers.statedAt, requestedBy: dossiers.requestedBy, finishedAt: dossiers.finishedAt, failure: dossiers.failure, documentFileId: dossiers.documentFileId, archiveFileId: dossiers.archiveFileId })
+    .select({
+      id: dossiers.id,
+      statedAt: dossiers.statedAt,
+      requestedBy: dossiers.requestedBy,
+      finishedAt: dossiers.finishedAt,
+      failure: dossiers.failure,
+      documentFileId: dossiers.documentFileId,
+      archiveFileId: dossiers.archiveFileId,
+    })
     .from(dossiers)
     .where(eq(dossiers.lotId, lotId))
     .orderBy(desc(dossiers.id))
@@ -59,4 +86,7 @@ async function readMade(ctx: Pick<Ctx, 'tx'>, lotId: string) {
 }
 
 /** Where bytes lie in storage is nobody's business outside. */
-const withoutKeys = (content: DossierContent) => ({ ...content, files: content.files.map(({ storageKey: _, ...file }) => file) });
+const withoutKeys = (content: DossierContent) => ({
+  ...content,
+  files: content.files.map(({ storageKey: _, ...file }) => file),
+});

@@ -13,13 +13,23 @@ import type { DossierLinkFace } from './contract';
 export async function readDossierLink(ctx: Ctx, { token }: { token: string }): Promise<DossierLinkFace> {
   authorize(ctx, 'public.use');
   const [link] = await ctx.tx
-    .select({ shopId: dossierLinks.shopId, expiresAt: dossierLinks.expiresAt, withdrawnAt: dossierLinks.withdrawnAt })
+    .select({
+      shopId: dossierLinks.shopId,
+      expiresAt: dossierLinks.expiresAt,
+      withdrawnAt: dossierLinks.withdrawnAt,
+    })
     .from(dossierLinks)
     .where(eq(dossierLinks.tokenHash, hashToken(token)));
   if (!link) return { state: 'unknown', shop: null, phone: null, zone: null, endedAt: null };
-  const [shop] = await inShopOf(ctx.tx, ctx.tenant, link.shopId, () => ctx.tx.select({ name: shops.name, phone: shops.phone, zone: shops.zone }).from(shops).where(eq(shops.id, link.shopId)));
+  const [shop] = await inShopOf(ctx.tx, ctx.tenant, link.shopId, () =>
+    ctx.tx
+      .select({ name: shops.name, phone: shops.phone, zone: shops.zone })
+      .from(shops)
+      .where(eq(shops.id, link.shopId)),
+  );
   const face = { shop: shop?.name ?? null, phone: shop?.phone ?? null, zone: shop?.zone ?? null };
-  if (link.withdrawnAt !== null) return { ...face, state: 'withdrawn', endedAt: link.withdrawnAt.toISOString() };
+  if (link.withdrawnAt !== null)
+    return { ...face, state: 'withdrawn', endedAt: link.withdrawnAt.toISOString() };
   if (link.expiresAt <= ctx.now) return { ...face, state: 'ended', endedAt: link.expiresAt.toISOString() };
   return { ...face, state: 'open', endedAt: null };
 }

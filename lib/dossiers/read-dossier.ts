@@ -6,7 +6,8 @@ import { notFound } from '@/lib/errors';
 import type { DossierBatch, DossierContent, DossierFile } from './content';
 
 type Row<T> = T & Record<string, unknown>;
-const iso = (column: string) => sql.raw(`to_char(${column} at time zone 'UTC', 'YYYY-MM-DD"T"HH24:MI:SS"Z"')`);
+const iso = (column: string) =>
+  sql.raw(`to_char(${column} at time zone 'UTC', 'YYYY-MM-DD"T"HH24:MI:SS"Z"')`);
 
 /** Reads the whole chain of evidence of a lot: who made it of what, where it went, what was proved, who signed, where it is. */
 export async function readDossier(ctx: Pick<Ctx, 'tx'>, lotId: string): Promise<DossierContent> {
@@ -22,7 +23,10 @@ export async function readDossier(ctx: Pick<Ctx, 'tx'>, lotId: string): Promise<
   };
 }
 
-async function readHead(ctx: Pick<Ctx, 'tx'>, lotId: string): Promise<Pick<DossierContent, 'shop' | 'lot' | 'part'>> {
+async function readHead(
+  ctx: Pick<Ctx, 'tx'>,
+  lotId: string,
+): Promise<Pick<DossierContent, 'shop' | 'lot' | 'part'>> {
   const { rows } = await ctx.tx.execute<Row<Pick<DossierContent, 'shop' | 'lot' | 'part'>>>(sql`
     select jsonb_build_object('name', s.name, 'address', s.address, 'zone', s.zone) as shop,
       jsonb_build_object('id', l.id, 'number', l.number, 'heat', l.heat, 'madeOn', ${iso('l.made_on')}, 'serialised', l.serialised,
@@ -110,6 +114,8 @@ async function readFiles(ctx: Pick<Ctx, 'tx'>, lotId: string): Promise<DossierFi
 }
 
 async function readAuditHead(ctx: Pick<Ctx, 'tx'>): Promise<DossierContent['auditHead']> {
-  const { rows } = await ctx.tx.execute<{ seq: number; hash: string }>(sql`select seq::int, hash from audit_entries order by seq desc limit 1`);
+  const { rows } = await ctx.tx.execute<{ seq: number; hash: string }>(
+    sql`select seq::int, hash from audit_entries order by seq desc limit 1`,
+  );
   return rows[0] ?? null;
 }

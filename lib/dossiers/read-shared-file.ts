@@ -25,11 +25,17 @@ export async function openSharedFile(outside: Outside, { token, fileId, inline }
     const { evidence, made } = await openDossierLink(ctx, { token });
     const named = [...evidence.files.map((one) => one.id), made?.documentFileId, made?.archiveFileId];
     if (!named.includes(fileId)) throw notFound('file');
-    return throughDossierLink(ctx, token, async (inner) => (await inner.tx.select().from(files).where(eq(files.id, fileId)))[0]);
+    return throughDossierLink(
+      ctx,
+      token,
+      async (inner) => (await inner.tx.select().from(files).where(eq(files.id, fileId)))[0],
+    );
   });
   if (file?.state !== 'verified') throw notFound('file');
   const { body } = await getObject(file.storageKey);
-  return new Response(Readable.toWeb(body) as ReadableStream<Uint8Array>, { headers: fileHeaders(file, inline === '1') });
+  return new Response(Readable.toWeb(body) as ReadableStream<Uint8Array>, {
+    headers: fileHeaders(file, inline === '1'),
+  });
 }
 
 export async function readSharedFile(ctx: Ctx, _input: Input, content: Response): Promise<Response> {

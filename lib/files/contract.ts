@@ -22,7 +22,12 @@ export const FileView = z.object({
 export type FileView = z.output<typeof FileView>;
 
 /** Where the bytes go: a PUT of exactly these headers and exactly the announced bytes, soon. */
-export const SignedUpload = z.object({ method: z.literal('PUT'), url: z.string(), headers: z.record(z.string(), z.string()), expiresAt: Moment });
+export const SignedUpload = z.object({
+  method: z.literal('PUT'),
+  url: z.string(),
+  headers: z.record(z.string(), z.string()),
+  expiresAt: Moment,
+});
 export type SignedUpload = z.output<typeof SignedUpload>;
 
 export const requestUpload = declare({
@@ -35,7 +40,10 @@ export const requestUpload = declare({
   input: z.object({
     purpose: z.enum(FILE_PURPOSES),
     batchId: Id.optional(),
-    name: z.string().min(1, 'The file has no name.').max(1000, 'The name of the file is longer than 1000 characters.'),
+    name: z
+      .string()
+      .min(1, 'The file has no name.')
+      .max(1000, 'The name of the file is longer than 1000 characters.'),
     mediaType: z.string().max(200).default(''),
     size: z.int().min(0),
     sha256: z.string().regex(/^[0-9a-f]{64}$/, 'Give the SHA-256 of the file as 64 hexadecimal digits.'),

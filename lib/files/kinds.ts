@@ -51,13 +51,20 @@ const kindNames = Object.keys(KINDS) as FileKind[];
 
 /** For the browser's file chooser. A phone offers its camera only where a type of picture is named. */
 export const acceptedFiles = (purpose: FilePurpose): string =>
-  (TAKEN[purpose] ?? []).flatMap((kind) => [...KINDS[kind].endings.map((ending) => `.${ending}`), ...(KINDS[kind].mediaType.startsWith('image/') ? [KINDS[kind].mediaType] : [])]).join(',');
+  (TAKEN[purpose] ?? [])
+    .flatMap((kind) => [
+      ...KINDS[kind].endings.map((ending) => `.${ending}`),
+      ...(KINDS[kind].mediaType.startsWith('image/') ? [KINDS[kind].mediaType] : []),
+    ])
+    .join(',');
 
 /** The kind a stored media type stands for. */
-export const kindOfMediaType = (mediaType: string): FileKind | null => kindNames.find((kind) => KINDS[kind].mediaType === mediaType) ?? null;
+export const kindOfMediaType = (mediaType: string): FileKind | null =>
+  kindNames.find((kind) => KINDS[kind].mediaType === mediaType) ?? null;
 
 /** Shown in a page of its own, sandboxed, instead of being saved. */
-export const mayBeShownInline = (mediaType: string): boolean => mediaType === 'application/pdf' || mediaType.startsWith('image/');
+export const mayBeShownInline = (mediaType: string): boolean =>
+  mediaType === 'application/pdf' || mediaType.startsWith('image/');
 
 export interface Announced {
   purpose: FilePurpose;
@@ -70,11 +77,26 @@ export interface Announced {
 export function claimedKind(file: Announced): { kind: FileKind } | { refusal: string; tooLarge: boolean } {
   const taken = TAKEN[file.purpose] ?? [];
   const ending = /\.([^.]+)$/.exec(file.name)?.[1]?.toLowerCase();
-  const kind = ending === undefined ? kindOfMediaType(file.mediaType) : kindNames.find((one) => (KINDS[one].endings as readonly string[]).includes(ending));
+  const kind =
+    ending === undefined
+      ? kindOfMediaType(file.mediaType)
+      : kindNames.find((one) => (KINDS[one].endings as readonly string[]).includes(ending));
   const word = PURPOSE_WORDS[file.purpose];
-  if (!kind || !taken.includes(kind)) return { refusal: `${file.name} cannot be ${withArticle(word)}: that is ${oneOf(taken)}. Save it as one of these and send that.`, tooLarge: false };
-  if (file.size === 0) return { refusal: `${file.name} is empty: it has 0 bytes. Look at the file on your side and choose it again.`, tooLarge: false };
-  if (file.size > LARGEST_FILE) return { refusal: `${file.name} has ${sizeWords(file.size)}; the most is 50 MB. Scan it in fewer colours or split it.`, tooLarge: true };
+  if (!kind || !taken.includes(kind))
+    return {
+      refusal: `${file.name} cannot be ${withArticle(word)}: that is ${oneOf(taken)}. Save it as one of these and send that.`,
+      tooLarge: false,
+    };
+  if (file.size === 0)
+    return {
+      refusal: `${file.name} is empty: it has 0 bytes. Look at the file on your side and choose it again.`,
+      tooLarge: false,
+    };
+  if (file.size > LARGEST_FILE)
+    return {
+      refusal: `${file.name} has ${sizeWords(file.size)}; the most is 50 MB. Scan it in fewer colours or split it.`,
+      tooLarge: true,
+    };
   return { kind };
 }
 

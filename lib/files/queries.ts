@@ -20,7 +20,13 @@ export const fileColumns = {
 };
 
 /** A file as a page of another thing names it. */
-export const fileRefColumns = { id: files.id, name: files.name, size: files.size, mediaType: files.mediaType, sha256: files.sha256 };
+export const fileRefColumns = {
+  id: files.id,
+  name: files.name,
+  size: files.size,
+  mediaType: files.mediaType,
+  sha256: files.sha256,
+};
 
 export async function getFile(ctx: Ctx, { fileId }: { fileId: string }) {
   authorize(ctx, 'file.read');

@@ -32,12 +32,20 @@ export async function requestUpload(ctx: Ctx, input: RequestUploadInput) {
   authorize(ctx, 'file.add');
   const name = safeFileName(input.name);
   const claimed = claimedKind({ ...input, name });
-  if ('refusal' in claimed) throw new AppError(claimed.tooLarge ? 'too_large' : 'bad_input', claimed.refusal, { fields: [{ field: 'file', message: claimed.refusal }] });
+  if ('refusal' in claimed)
+    throw new AppError(claimed.tooLarge ? 'too_large' : 'bad_input', claimed.refusal, {
+      fields: [{ field: 'file', message: claimed.refusal }],
+    });
   const { shopId, processorId } = await whereItBelongs(ctx, input);
   const mediaType = mediaTypeOf(claimed.kind);
 
   return inOwningShop(ctx, shopId, async (inner) => {
-    const wanted = { purpose: input.purpose, sha256: input.sha256, batchId: input.batchId ?? null, processorId };
+    const wanted = {
+      purpose: input.purpose,
+      sha256: input.sha256,
+      batchId: input.batchId ?? null,
+      processorId,
+    };
     await oneAtATime(inner, wanted);
     const here = await findSameFile(inner, wanted, 'verified');
     // A drawing or mill certificate serves many parts and lots; in a batch the same paper twice is a slip of the hand.
@@ -47,26 +55,48 @@ export async function requestUpload(ctx: Ctx, input: RequestUploadInput) {
     const awaited = await findSameFile(inner, wanted, 'awaited');
     const fileId = awaited?.id ?? (await announce(inner, { ...wanted, name, mediaType, size: input.size }));
     const { storageKey, ...file } = await fileOf(inner, fileId);
-    const upload = await presignUpload({ key: storageKey, mediaType: file.mediaType, sizeBytes: file.size, sha256: input.sha256, now: ctx.now });
+    const upload = await presignUpload({
+      key: storageKey,
+      mediaType: file.mediaType,
+      sizeBytes: file.size,
+      sha256: input.sha256,
+      now: ctx.now,
+    });
     return { file, upload };
   });
 }
 
-async function whereItBelongs(ctx: Ctx, { purpose, batchId }: RequestUploadInput): Promise<{ shopId: string; processorId: string | null }> {
+async function whereItBelongs(
+  ctx: Ctx,
+  { purpose, batchId }: RequestUploadInput,
+): Promise<{ shopId: string; processorId: string | null }> {
   const { tenant } = ctx;
-  if (tenant.kind === 'processor' && !FROM_PROCESSORS.includes(purpose)) throw new AppError('not_allowed', `Only the shop itself adds a ${purposeWords(purpose)}.`);
+  if (tenant.kind === 'processor' && !FROM_PROCESSORS.includes(purpose))
+    throw new AppError('not_allowed', `Only the shop itself adds a ${purposeWords(purpose)}.`);
   if (batchId === undefined) {
-    if (tenant.kind === 'processor' || NEEDS_BATCH.includes(purpose)) throw new AppError('bad_input', 'Say for which batch this file is.', { fields: [{ field: 'batchId', message: 'Say for which batch this file is.' }] });
+    if (tenant.kind === 'processor' || NEEDS_BATCH.includes(purpose))
+      throw new AppError('bad_input', 'Say for which batch this file is.', {
+        fields: [{ field: 'batchId', message: 'Say for which batch this file is.' }],
+      });
     return { shopId: shopOf(ctx), processorId: null };
   }
   const [batch] = await ctx.tx
-    .select({ shopId: batches.shopId, number: batches.number, dispatchedAt: batches.dispatchedAt, cancelledAt: batches.cancelledAt })
+    .select({
+      shopId: batches.shopId,
+      number: batches.number,
+      dispatchedAt: batches.dispatchedAt,
+      cancelledAt: batches.cancelledAt,
+    })
     .from(batches)
     .where(eq(batches.id, batchId));
   if (!batch) throw notFound('batch');
-  if (batch.cancelledAt !== null) throw new AppError('conflict', `${batch.number} is cancelled. Nothing more is added to it.`);
+  if (batch.cancelledAt !== null)
+    throw new AppError('conflict', `${batch.number} is cancelled. Nothing more is added to it.`);
   if (batch.dispatchedAt === null && NEEDS_BATCH.includes(purpose)) {
-    throw new AppError('conflict', `${batch.number} has not been dispatched yet, so there is no ${purposeWords(purpose)} for it. Dispatch it first, or choose the batch this belongs to.`);
+    throw new AppError(
+      'conflict',
+      `${batch.number} has not been dispatched yet, so there is no ${purposeWords(purpose)} for it. Dispatch it first, or choose the batch this belongs to.`,
+    );
   }
   return { shopId: batch.shopId, processorId: tenant.kind === 'processor' ? tenant.processorId : null };
 }
@@ -84,7 +114,16 @@ interface NewFile {
 async function announce(ctx: Ctx, file: NewFile): Promise<string> {
   const id = newId();
   const shopId = shopOf(ctx);
-  await ctx.tx.insert(files).values({ id, shopId, ...file, storageKey: `files/${shopId}/${id}`, uploadedBy: ctx.actor.name, createdAt: ctx.now });
+  await ctx.tx
+    .insert(files)
+    .values({
+      id,
+      shopId,
+      ...file,
+      storageKey: `files/${shopId}/${id}`,
+      uploadedBy: ctx.actor.name,
+      createdAt: ctx.now,
+    });
   await recordAudit(ctx, { action: 'file.announce', entity: 'file', entityId: id, after: { ...file } });
   return id;
 }

@@ -17,7 +17,10 @@ export async function sniffKind(head: Buffer): Promise<Sniffed> {
   const found = await fileTypeFromBuffer(head);
   const kind = found && kindOfMediaType(found.mime === 'image/heif' ? 'image/heic' : found.mime);
   if (kind) return { is: kind };
-  return { is: 'other', says: found ? `a ${found.ext.toUpperCase()} file` : 'no kind of file that can be read here' };
+  return {
+    is: 'other',
+    says: found ? `a ${found.ext.toUpperCase()} file` : 'no kind of file that can be read here',
+  };
 }
 
 /** Whether bytes that look like `sniffed` may bear a name that says `claimed`. */
@@ -41,7 +44,14 @@ function wideTextOf(head: Buffer): string | null {
 }
 
 function looksLikeMail(head: Buffer): boolean {
-  const fields = head.subarray(0, 4096).toString('latin1').split(/\r?\n\r?\n/)[0]?.split(/\r?\n/) ?? [];
-  const names = fields.filter((line) => /^[!-9;-~]+:/.test(line)).map((line) => line.split(':')[0]?.toLowerCase());
+  const fields =
+    head
+      .subarray(0, 4096)
+      .toString('latin1')
+      .split(/\r?\n\r?\n/)[0]
+      ?.split(/\r?\n/) ?? [];
+  const names = fields
+    .filter((line) => /^[!-9;-~]+:/.test(line))
+    .map((line) => line.split(':')[0]?.toLowerCase());
   return ['from', 'date'].every((name) => names.includes(name)) && /^[!-9;-~]+:/.test(fields[0] ?? '');
 }

@@ -22,7 +22,10 @@ export interface MadeFile {
  * Keeps a file that the product made itself (traveller, order, dossier). Bytes first, then the row that lets them
  * count, so no row ever points at nothing; a job that is run again finds what it stored before.
  */
-export async function storeMadeFile(tools: Pick<JobTools, 'inShop'>, { content, ...file }: MadeFile): Promise<{ fileId: string; sha256: string }> {
+export async function storeMadeFile(
+  tools: Pick<JobTools, 'inShop'>,
+  { content, ...file }: MadeFile,
+): Promise<{ fileId: string; sha256: string }> {
   const sha256 = createHash('sha256').update(content).digest('hex');
   const storageKey = `made/${file.shopId}/${file.batchId ?? 'shop'}/${file.purpose}/${sha256}`;
   await putObject({ key: storageKey, content, mediaType: file.mediaType });
@@ -31,14 +34,38 @@ export async function storeMadeFile(tools: Pick<JobTools, 'inShop'>, { content, 
     const id = newId();
     const [added] = await ctx.tx
       .insert(files)
-      .values({ id, ...file, size: content.length, sha256, storageKey, state: 'verified', uploadedBy: 'Lotwright', createdAt: ctx.now, verifiedAt: ctx.now })
+      .values({
+        id,
+        ...file,
+        size: content.length,
+        sha256,
+        storageKey,
+        state: 'verified',
+        uploadedBy: 'Lotwright',
+        createdAt: ctx.now,
+        verifiedAt: ctx.now,
+      })
       .onConflictDoNothing({ target: files.storageKey })
       .returning({ id: files.id });
     if (added) {
-      await recordAudit(ctx, { action: 'file.make', entity: 'file', entityId: id, after: { name: file.name, purpose: file.purpose, batchId: file.batchId, size: content.length, sha256 } });
+      await recordAudit(ctx, {
+        action: 'file.make',
+        entity: 'file',
+        entityId: id,
+        after: {
+          name: file.name,
+          purpose: file.purpose,
+          batchId: file.batchId,
+          size: content.length,
+          sha256,
+        },
+      });
       return { fileId: id, sha256 };
     }
-    const [here] = await ctx.tx.select({ id: files.id }).from(files).where(and(eq(files.storageKey, storageKey)));
+    const [here] = await ctx.tx
+      .select({ id: files.id })
+      .from(files)
+      .where(and(eq(files.storageKey, storageKey)));
     if (!here) throw new Error(`file ${storageKey} is neither new nor here`);
     return { fileId: here.id, sha256 };
   });

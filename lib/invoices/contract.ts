@@ -5,14 +5,35 @@ import { Day, Done, Id, Moment, PageQuery, pageOf } from '@/lib/api/shapes';
 import { STAGES } from '@/lib/batches/stage';
 import { Currency, Minor } from '@/lib/money';
 
-export const INVOICE_LINE_KINDS = ['pieces', 'lot_minimum', 'certification', 'freight', 'tax', 'other'] as const;
+export const INVOICE_LINE_KINDS = [
+  'pieces',
+  'lot_minimum',
+  'certification',
+  'freight',
+  'tax',
+  'other',
+] as const;
 /** Which of them a list shows: what asks for something, what is done with. */
 export const INVOICE_VIEWS = ['open', 'paid', 'refused', 'all'] as const;
 export type InvoiceView = (typeof INVOICE_VIEWS)[number];
 /** What is to be done with it next; follows from its records by `invoiceState`. */
-export const INVOICE_STATES = ['to_enter', 'to_clear', 'to_approve', 'second_approval', 'to_pay', 'paying', 'payment_failed', 'paid', 'refused'] as const;
+export const INVOICE_STATES = [
+  'to_enter',
+  'to_clear',
+  'to_approve',
+  'second_approval',
+  'to_pay',
+  'paying',
+  'payment_failed',
+  'paid',
+  'refused',
+] as const;
 
-const Reason = z.string().trim().min(5, 'Give the reason in a few words.').max(500, 'Write 500 characters or less.');
+const Reason = z
+  .string()
+  .trim()
+  .min(5, 'Give the reason in a few words.')
+  .max(500, 'Write 500 characters or less.');
 
 export const InvoiceLineInput = z
   .object({
@@ -23,7 +44,10 @@ export const InvoiceLineInput = z
     unitPriceMinor: Minor.nullable(),
     amountMinor: Minor,
   })
-  .refine((line) => line.kind !== 'pieces' || (line.pieces !== null && line.unitPriceMinor !== null), { message: 'Enter pieces and price.', path: ['pieces'] });
+  .refine((line) => line.kind !== 'pieces' || (line.pieces !== null && line.unitPriceMinor !== null), {
+    message: 'Enter pieces and price.',
+    path: ['pieces'],
+  });
 export type InvoiceLineInput = z.output<typeof InvoiceLineInput>;
 
 export const InvoiceRow = z.object({
@@ -51,7 +75,11 @@ export const listInvoices = declare({
   summary: 'Invoices, newest first',
   side: 'shop',
   permission: 'invoice.read',
-  input: PageQuery.extend({ after: Id.optional(), batchId: Id.optional(), show: z.enum(INVOICE_VIEWS).default('all') }),
+  input: PageQuery.extend({
+    after: Id.optional(),
+    batchId: Id.optional(),
+    show: z.enum(INVOICE_VIEWS).default('all'),
+  }),
   response: pageOf(InvoiceRow),
 });
 
@@ -61,7 +89,9 @@ export const InvoiceDifference = z.object({
   seq: z.int().nullable(),
   overMinor: z.int(),
   sentence: z.string(),
-  clearance: z.object({ choice: z.enum(['accept', 'withhold']), reason: z.string(), by: z.string(), at: Moment }).nullable(),
+  clearance: z
+    .object({ choice: z.enum(['accept', 'withhold']), reason: z.string(), by: z.string(), at: Moment })
+    .nullable(),
 });
 export type InvoiceDifference = z.output<typeof InvoiceDifference>;
 
@@ -79,20 +109,67 @@ export const InvoiceDetail = InvoiceRow.extend({
   approved: Approval.nullable(),
   secondApproved: Approval.nullable(),
   secondApprovalAboveMinor: z.int().nullable(),
-  lines: z.array(z.object({ seq: z.int(), kind: z.enum(INVOICE_LINE_KINDS), lineId: Id.nullable(), description: z.string(), pieces: z.int().nullable(), unitPriceMinor: z.int().nullable(), amountMinor: z.int() })),
+  lines: z.array(
+    z.object({
+      seq: z.int(),
+      kind: z.enum(INVOICE_LINE_KINDS),
+      lineId: Id.nullable(),
+      description: z.string(),
+      pieces: z.int().nullable(),
+      unitPriceMinor: z.int().nullable(),
+      amountMinor: z.int(),
+    }),
+  ),
   order: z.object({
     currency: z.string(),
     lotMinimumMinor: z.int(),
     certificationFeeMinor: z.int(),
     expectedMinor: z.int(),
-    lines: z.array(z.object({ lineId: Id, lineNo: z.int(), partNumber: z.string(), partRevision: z.string(), partName: z.string(), ordered: z.int(), unitPriceMinor: z.int(), accepted: z.int() })),
+    lines: z.array(
+      z.object({
+        lineId: Id,
+        lineNo: z.int(),
+        partNumber: z.string(),
+        partRevision: z.string(),
+        partName: z.string(),
+        ordered: z.int(),
+        unitPriceMinor: z.int(),
+        accepted: z.int(),
+      }),
+    ),
   }),
   differences: z.array(InvoiceDifference),
   /** Signed certificates of the batch, with the pieces they cover. */
   papers: z.array(z.object({ id: Id, number: z.string().nullable(), pieces: z.int() })),
-  seenBefore: z.array(z.object({ id: Id, number: z.string().nullable(), batchNumber: z.string(), why: z.enum(['same_number', 'same_order', 'same_total', 'same_file']) })),
-  payments: z.array(z.object({ id: Id, attempt: z.int(), amountMinor: z.int(), state: z.enum(['pending', 'succeeded', 'failed', 'refunded']), failure: z.string().nullable(), handedOver: z.boolean(), by: z.string(), startedAt: Moment, endedAt: Moment.nullable() })),
-  entries: z.array(z.object({ kind: z.enum(['invoiced', 'withheld', 'credited', 'paid', 'refunded']), amountMinor: z.int(), by: z.string(), at: Moment })),
+  seenBefore: z.array(
+    z.object({
+      id: Id,
+      number: z.string().nullable(),
+      batchNumber: z.string(),
+      why: z.enum(['same_number', 'same_order', 'same_total', 'same_file']),
+    }),
+  ),
+  payments: z.array(
+    z.object({
+      id: Id,
+      attempt: z.int(),
+      amountMinor: z.int(),
+      state: z.enum(['pending', 'succeeded', 'failed', 'refunded']),
+      failure: z.string().nullable(),
+      handedOver: z.boolean(),
+      by: z.string(),
+      startedAt: Moment,
+      endedAt: Moment.nullable(),
+    }),
+  ),
+  entries: z.array(
+    z.object({
+      kind: z.enum(['invoiced', 'withheld', 'credited', 'paid', 'refunded']),
+      amountMinor: z.int(),
+      by: z.string(),
+      at: Moment,
+    }),
+  ),
   /** What paying needs besides the approval. `otherHands`: the shop refuses that who approved also pays, and I approved. */
   payable: z.object({ methodSaved: z.boolean(), processorReady: z.boolean(), otherHands: z.boolean() }),
 });
@@ -101,7 +178,16 @@ export type InvoiceDetail = z.output<typeof InvoiceDetail>;
 const OfInvoice = z.object({ invoiceId: Id, version: z.int() });
 const Changed = z.object({ version: z.int() });
 
-export const getInvoice = declare({ id: 'getInvoice', method: 'get', path: '/invoices/{invoiceId}', summary: 'One invoice against its order and the accepted pieces', side: 'shop', permission: 'invoice.read', input: z.object({ invoiceId: Id }), response: InvoiceDetail });
+export const getInvoice = declare({
+  id: 'getInvoice',
+  method: 'get',
+  path: '/invoices/{invoiceId}',
+  summary: 'One invoice against its order and the accepted pieces',
+  side: 'shop',
+  permission: 'invoice.read',
+  input: z.object({ invoiceId: Id }),
+  response: InvoiceDetail,
+});
 
 export const addInvoice = declare({
   id: 'addInvoice',
@@ -139,14 +225,84 @@ export const clearDifference = declare({
   summary: 'Clear one difference: pay it as invoiced, or pay without it',
   side: 'shop',
   permission: 'invoice.enter',
-  input: OfInvoice.extend({ difference: z.string().max(80), choice: z.enum(['accept', 'withhold']), reason: z.string().trim().max(500).default('') }),
+  input: OfInvoice.extend({
+    difference: z.string().max(80),
+    choice: z.enum(['accept', 'withhold']),
+    reason: z.string().trim().max(500).default(''),
+  }),
   response: Changed,
 });
 
-export const undoClearance = declare({ id: 'undoClearance', method: 'post', path: '/invoices/{invoiceId}/undo-clear', summary: 'Take a clearance back', side: 'shop', permission: 'invoice.enter', input: OfInvoice.extend({ difference: z.string().max(80) }), response: Changed });
-export const approveInvoice = declare({ id: 'approveInvoice', method: 'post', path: '/invoices/{invoiceId}/approve', summary: 'Approve what is to be paid', side: 'shop', permission: 'invoice.approve', input: OfInvoice, response: Changed });
-export const approveInvoiceSecond = declare({ id: 'approveInvoiceSecond', method: 'post', path: '/invoices/{invoiceId}/approve-second', summary: 'Approve a second time, above the shop’s limit', side: 'shop', permission: 'invoice.approve_second', input: OfInvoice, response: Changed });
-export const refuseInvoice = declare({ id: 'refuseInvoice', method: 'post', path: '/invoices/{invoiceId}/refuse', summary: 'Refuse an invoice; its number is free for a corrected one', side: 'shop', permission: 'invoice.approve', input: OfInvoice.extend({ reason: Reason }), response: Changed });
-export const creditInvoice = declare({ id: 'creditInvoice', method: 'post', path: '/invoices/{invoiceId}/credit', summary: 'Record a credit of the processor on an approved invoice', side: 'shop', permission: 'invoice.approve', input: OfInvoice.extend({ amountMinor: Minor.min(1, 'Enter the amount of the credit.'), reference: z.string().trim().min(1, 'Enter the number of the credit.').max(60) }), response: Changed });
-export const payInvoice = declare({ id: 'payInvoice', method: 'post', path: '/invoices/{invoiceId}/pay', summary: 'Pay an approved invoice, once', side: 'shop', permission: 'invoice.pay', input: OfInvoice, response: z.object({ paymentId: Id }) });
-export const waivePayment = declare({ id: 'waivePayment', method: 'post', path: '/batches/{batchId}/waive-payment', summary: 'Let pieces pass the gate without payment, with a reason', side: 'shop', permission: 'payment.waive', input: z.object({ batchId: Id, reason: Reason }), response: Done });
+export const undoClearance = declare({
+  id: 'undoClearance',
+  method: 'post',
+  path: '/invoices/{invoiceId}/undo-clear',
+  summary: 'Take a clearance back',
+  side: 'shop',
+  permission: 'invoice.enter',
+  input: OfInvoice.extend({ difference: z.string().max(80) }),
+  response: Changed,
+});
+export const approveInvoice = declare({
+  id: 'approveInvoice',
+  method: 'post',
+  path: '/invoices/{invoiceId}/approve',
+  summary: 'Approve what is to be paid',
+  side: 'shop',
+  permission: 'invoice.approve',
+  input: OfInvoice,
+  response: Changed,
+});
+export const approveInvoiceSecond = declare({
+  id: 'approveInvoiceSecond',
+  method: 'post',
+  path: '/invoices/{invoiceId}/approve-second',
+  summary: 'Approve a second time, above the shop’s limit',
+  side: 'shop',
+  permission: 'invoice.approve_second',
+  input: OfInvoice,
+  response: Changed,
+});
+export const refuseInvoice = declare({
+  id: 'refuseInvoice',
+  method: 'post',
+  path: '/invoices/{invoiceId}/refuse',
+  summary: 'Refuse an invoice; its number is free for a corrected one',
+  side: 'shop',
+  permission: 'invoice.approve',
+  input: OfInvoice.extend({ reason: Reason }),
+  response: Changed,
+});
+export const creditInvoice = declare({
+  id: 'creditInvoice',
+  method: 'post',
+  path: '/invoices/{invoiceId}/credit',
+  summary: 'Record a credit of the processor on an approved invoice',
+  side: 'shop',
+  permission: 'invoice.approve',
+  input: OfInvoice.extend({
+    amountMinor: Minor.min(1, 'Enter the amount of the credit.'),
+    reference: z.string().trim().min(1, 'Enter the number of the credit.').max(60),
+  }),
+  response: Changed,
+});
+export const payInvoice = declare({
+  id: 'payInvoice',
+  method: 'post',
+  path: '/invoices/{invoiceId}/pay',
+  summary: 'Pay an approved invoice, once',
+  side: 'shop',
+  permission: 'invoice.pay',
+  input: OfInvoice,
+  response: z.object({ paymentId: Id }),
+});
+export const waivePayment = declare({
+  id: 'waivePayment',
+  method: 'post',
+  path: '/batches/{batchId}/waive-payment',
+  summary: 'Let pieces pass the gate without payment, with a reason',
+  side: 'shop',
+  permission: 'payment.waive',
+  input: z.object({ batchId: Id, reason: Reason }),
+  response: Done,
+});

@@ -74,14 +74,30 @@ export interface Difference {
  */
 export function differencesOf(order: OrderSide, invoice: InvoiceSide): Difference[] {
   if (invoice.currency !== order.currency) {
-    return [{ key: 'currency_mismatch', code: 'currency_mismatch', seq: null, overMinor: 0, sentence: `The invoice is in ${invoice.currency}, the order in ${order.currency}.` }];
+    return [
+      {
+        key: 'currency_mismatch',
+        code: 'currency_mismatch',
+        seq: null,
+        overMinor: 0,
+        sentence: `The invoice is in ${invoice.currency}, the order in ${order.currency}.`,
+      },
+    ];
   }
   const sum = invoice.lines.reduce((total, line) => total + line.amountMinor, 0);
   const totalDiffers = sum !== invoice.totalMinor;
   return [
     ...invoice.lines.flatMap((line) => lineDifferences(order, invoice, line)),
     ...(totalDiffers
-      ? [{ key: 'arithmetic', code: 'arithmetic' as const, seq: null, overMinor: Math.max(0, invoice.totalMinor - sum), sentence: `The lines add up to ${amountText(sum)}, the invoice says ${amountText(invoice.totalMinor)}.` }]
+      ? [
+          {
+            key: 'arithmetic',
+            code: 'arithmetic' as const,
+            seq: null,
+            overMinor: Math.max(0, invoice.totalMinor - sum),
+            sentence: `The lines add up to ${amountText(sum)}, the invoice says ${amountText(invoice.totalMinor)}.`,
+          },
+        ]
       : []),
   ];
 }
@@ -91,32 +107,73 @@ function lineDifferences(order: OrderSide, invoice: InvoiceSide, line: InvoiceLi
     case 'pieces':
       return pieceDifferences(order, invoice, line);
     case 'lot_minimum':
-      return allowedUpTo(line, 'lot_minimum_mismatch', allowedToMinimum(order, invoice), 'to reach the lot minimum');
+      return allowedUpTo(
+        line,
+        'lot_minimum_mismatch',
+        allowedToMinimum(order, invoice),
+        'to reach the lot minimum',
+      );
     case 'certification':
       return allowedUpTo(line, 'fee_not_agreed', order.certificationFeeMinor, 'for the papers');
     case 'freight':
     case 'tax':
     case 'other':
-      return line.amountMinor > 0 ? [difference('not_on_order', line, line.amountMinor, 'Not on the order.')] : [];
+      return line.amountMinor > 0
+        ? [difference('not_on_order', line, line.amountMinor, 'Not on the order.')]
+        : [];
   }
 }
 
 function pieceDifferences(order: OrderSide, invoice: InvoiceSide, line: InvoiceLine): Difference[] {
   const ordered = order.lines.find((one) => one.lineId === line.lineId);
   if (!ordered) return [difference('not_on_order', line, line.amountMinor, 'Not on the order.')];
-  const earlier = invoice.lines.filter((one) => one.kind === 'pieces' && one.lineId === line.lineId && one.seq < line.seq);
-  if (earlier.length > 0) return [difference('line_twice', line, line.amountMinor, `Line ${ordered.lineNo} of the order is invoiced twice.`)];
+  const earlier = invoice.lines.filter(
+    (one) => one.kind === 'pieces' && one.lineId === line.lineId && one.seq < line.seq,
+  );
+  if (earlier.length > 0)
+    return [
+      difference(
+        'line_twice',
+        line,
+        line.amountMinor,
+        `Line ${ordered.lineNo} of the order is invoiced twice.`,
+      ),
+    ];
 
   const pieces = line.pieces ?? 0;
   const price = line.unitPriceMinor ?? 0;
   const found: Difference[] = [];
   const product = pieces * price;
-  if (product !== line.amountMinor) found.push(difference('line_arithmetic', line, Math.max(0, line.amountMinor - product), `${pieces} at ${amountText(price)} are ${amountText(product)}, not ${amountText(line.amountMinor)}.`));
+  if (product !== line.amountMinor)
+    found.push(
+      difference(
+        'line_arithmetic',
+        line,
+        Math.max(0, line.amountMinor - product),
+        `${pieces} at ${amountText(price)} are ${amountText(product)}, not ${amountText(line.amountMinor)}.`,
+      ),
+    );
   // Price and pieces are told apart without counting any sum twice: the price over on accepted pieces, the pieces over at the invoiced price.
   const over = Math.max(0, pieces - ordered.accepted);
   const priceOver = price - ordered.unitPriceMinor;
-  if (priceOver > 0 && pieces - over > 0) found.push(difference('unit_price_mismatch', line, (pieces - over) * priceOver, `The price is ${amountText(priceOver)} a piece over the order.`));
-  if (over > 0) found.push(difference('quantity_above_accepted', line, over * price, `${over} ${over === 1 ? 'piece is' : 'pieces are'} not accepted.`));
+  if (priceOver > 0 && pieces - over > 0)
+    found.push(
+      difference(
+        'unit_price_mismatch',
+        line,
+        (pieces - over) * priceOver,
+        `The price is ${amountText(priceOver)} a piece over the order.`,
+      ),
+    );
+  if (over > 0)
+    found.push(
+      difference(
+        'quantity_above_accepted',
+        line,
+        over * price,
+        `${over} ${over === 1 ? 'piece is' : 'pieces are'} not accepted.`,
+      ),
+    );
   return found;
 }
 
@@ -133,10 +190,27 @@ function allowedToMinimum(order: OrderSide, invoice: InvoiceSide): number {
 
 function allowedUpTo(line: InvoiceLine, code: DifferenceCode, allowed: number, what: string): Difference[] {
   const over = line.amountMinor - allowed;
-  return over > 0 ? [difference(code, line, over, allowed === 0 ? `The order allows nothing ${what}.` : `The order allows ${amountText(allowed)} ${what}.`)] : [];
+  return over > 0
+    ? [
+        difference(
+          code,
+          line,
+          over,
+          allowed === 0
+            ? `The order allows nothing ${what}.`
+            : `The order allows ${amountText(allowed)} ${what}.`,
+        ),
+      ]
+    : [];
 }
 
-const difference = (code: DifferenceCode, line: InvoiceLine, overMinor: number, sentence: string): Difference => ({ key: `${code}:${line.seq}`, code, seq: line.seq, overMinor, sentence });
+const difference = (
+  code: DifferenceCode,
+  line: InvoiceLine,
+  overMinor: number,
+  sentence: string,
+): Difference => ({ key: `${code}:${line.seq}`, code, seq: line.seq, overMinor, sentence });
 
 /** What is to be paid once the given differences are withheld; never below nothing. */
-export const toPayMinor = (totalMinor: number, withheldMinor: readonly number[]): number => Math.max(0, totalMinor - withheldMinor.reduce((sum, one) => sum + one, 0));
+export const toPayMinor = (totalMinor: number, withheldMinor: readonly number[]): number =>
+  Math.max(0, totalMinor - withheldMinor.reduce((sum, one) => sum + one, 0));

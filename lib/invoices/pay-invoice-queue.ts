@@ -6,5 +6,11 @@ import { z } from 'zod';
  */
 export const payInvoiceQueue = {
   name: 'pay-invoice',
-  payload: z.object({ shopId: z.uuid(), paymentId: z.uuid(), customer: z.string(), paymentMethod: z.string(), destinationAccount: z.string() }),
+  payload: z.object({
+    shopId: z.uuid(),
+    paymentId: z.uuid(),
+    customer: z.string(),
+    paymentMethod: z.string(),
+    destinationAccount: z.string(),
+  }),
 };

@@ -13,10 +13,16 @@ import { readInvoice } from './read-invoice';
 import { remittanceOf } from './remittance';
 
 /** Queues the mail that says what was paid, for what, and what not; answers reach whoever paid. */
-export async function queueRemittance(ctx: Ctx, { invoiceId, paidMinor, paidBy }: { invoiceId: string; paidMinor: number; paidBy: string }): Promise<void> {
+export async function queueRemittance(
+  ctx: Ctx,
+  { invoiceId, paidMinor, paidBy }: { invoiceId: string; paidMinor: number; paidBy: string },
+): Promise<void> {
   const { invoice, lines, differences } = await readInvoice(ctx, invoiceId);
   const batch = await batchForMail(ctx, invoice.batchId);
-  const entries = await ctx.tx.select({ kind: moneyEntries.kind, amountMinor: moneyEntries.amountMinor }).from(moneyEntries).where(eq(moneyEntries.invoiceId, invoiceId));
+  const entries = await ctx.tx
+    .select({ kind: moneyEntries.kind, amountMinor: moneyEntries.amountMinor })
+    .from(moneyEntries)
+    .where(eq(moneyEntries.invoiceId, invoiceId));
   const [payer] = await ctx.tx.select({ email: users.email }).from(users).where(eq(users.id, paidBy));
   const invoiceNumber = invoice.number ?? 'without a number';
   await queueMail(ctx, {

@@ -5,7 +5,14 @@ import { clearances, invoiceLines, invoices } from '@/db/schema/money';
 import type { Ctx } from '@/lib/auth/context';
 import { AppError, notFound } from '@/lib/errors';
 
-import { DIFFERENCE_WORDS, differencesOf, toPayMinor, type Difference, type InvoiceLine, type OrderSide } from './differences';
+import {
+  DIFFERENCE_WORDS,
+  differencesOf,
+  toPayMinor,
+  type Difference,
+  type InvoiceLine,
+  type OrderSide,
+} from './differences';
 
 export type StoredInvoice = typeof invoices.$inferSelect;
 type Clearance = typeof clearances.$inferSelect;
@@ -26,7 +33,11 @@ export interface ReadInvoice {
  *
  * @param lock holds it until the transaction ends, for verbs that change it.
  */
-export async function readInvoice(ctx: Pick<Ctx, 'tx'>, invoiceId: string, { lock = false } = {}): Promise<ReadInvoice> {
+export async function readInvoice(
+  ctx: Pick<Ctx, 'tx'>,
+  invoiceId: string,
+  { lock = false } = {},
+): Promise<ReadInvoice> {
   const query = ctx.tx.select().from(invoices).where(eq(invoices.id, invoiceId));
   const [invoice] = await (lock ? query.for('update') : query);
   if (!invoice) throw notFound('invoice');
@@ -36,7 +47,10 @@ export async function readInvoice(ctx: Pick<Ctx, 'tx'>, invoiceId: string, { loc
 }
 
 /** Several at once, in a few statements however many there are. */
-export async function readInvoices(ctx: Pick<Ctx, 'tx'>, invoiceIds: readonly string[]): Promise<Map<string, ReadInvoice>> {
+export async function readInvoices(
+  ctx: Pick<Ctx, 'tx'>,
+  invoiceIds: readonly string[],
+): Promise<Map<string, ReadInvoice>> {
   if (invoiceIds.length === 0) return new Map();
   const found = await ctx.tx
     .select()
@@ -48,7 +62,16 @@ export async function readInvoices(ctx: Pick<Ctx, 'tx'>, invoiceIds: readonly st
 async function compareAll(ctx: Pick<Ctx, 'tx'>, found: readonly StoredInvoice[]): Promise<ReadInvoice[]> {
   const ids = found.map((invoice) => invoice.id);
   const lines = await ctx.tx
-    .select({ invoiceId: invoiceLines.invoiceId, seq: invoiceLines.seq, kind: invoiceLines.kind, lineId: invoiceLines.lineId, description: invoiceLines.description, pieces: invoiceLines.pieces, unitPriceMinor: invoiceLines.unitPriceMinor, amountMinor: invoiceLines.amountMinor })
+    .select({
+      invoiceId: invoiceLines.invoiceId,
+      seq: invoiceLines.seq,
+      kind: invoiceLines.kind,
+      lineId: invoiceLines.lineId,
+      description: invoiceLines.description,
+      pieces: invoiceLines.pieces,
+      unitPriceMinor: invoiceLines.unitPriceMinor,
+      amountMinor: invoiceLines.amountMinor,
+    })
     .from(invoiceLines)
     .where(inArray(invoiceLines.invoiceId, ids))
     .orderBy(asc(invoiceLines.seq));
@@ -56,38 +79,77 @@ async function compareAll(ctx: Pick<Ctx, 'tx'>, found: readonly StoredInvoice[])
   const cleared = await ctx.tx.select().from(clearances).where(inArray(clearances.invoiceId, ids));
   return found.flatMap((invoice) => {
     const order = orders.get(invoice.batchId);
-    const own = lines.filter((line) => line.invoiceId === invoice.id).map(({ invoiceId: _, ...line }) => line);
+    const own = lines
+      .filter((line) => line.invoiceId === invoice.id)
+      .map(({ invoiceId: _, ...line }) => line);
     return order ? [compare(invoice, order, own, cleared)] : [];
   });
 }
 
-function compare(invoice: StoredInvoice, order: InvoiceOrder, lines: InvoiceLine[], cleared: readonly Clearance[]): ReadInvoice {
+function compare(
+  invoice: StoredInvoice,
+  order: InvoiceOrder,
+  lines: InvoiceLine[],
+  cleared: readonly Clearance[],
+): ReadInvoice {
   const { totalMinor, currency } = invoice;
   const entered = invoice.enteredAt !== null && totalMinor !== null;
   const live = entered ? differencesOf(order, { currency, totalMinor, lines }) : [];
   const own = cleared.filter((row) => row.invoiceId === invoice.id);
-  const differences = invoice.approvedAt === null ? live.map((one) => ({ ...one, clearance: clearanceOf(one, own) })) : asApproved(own, live);
-  const withheld = differences.filter((one) => one.clearance?.choice === 'withhold').map((one) => one.overMinor);
+  const differences =
+    invoice.approvedAt === null
+      ? live.map((one) => ({ ...one, clearance: clearanceOf(one, own) }))
+      : asApproved(own, live);
+  const withheld = differences
+    .filter((one) => one.clearance?.choice === 'withhold')
+    .map((one) => one.overMinor);
   const payable = entered ? toPayMinor(totalMinor, withheld) : null;
-  return { invoice, lines, order, differences, withheldMinor: withheld.reduce((sum, one) => sum + one, 0), toPayMinor: invoice.approvedMinor ?? payable };
+  return {
+    invoice,
+    lines,
+    order,
+    differences,
+    withheldMinor: withheld.reduce((sum, one) => sum + one, 0),
+    toPayMinor: invoice.approvedMinor ?? payable,
+  };
 }
 
 /** A choice holds for the sum it was made about; when pieces are accepted or refused afterwards, the difference is open again. */
-const clearanceOf = (one: Difference, own: readonly Clearance[]): Clearance | null => own.find((row) => row.difference === one.key && row.amountMinor === one.overMinor) ?? null;
+const clearanceOf = (one: Difference, own: readonly Clearance[]): Clearance | null =>
+  own.find((row) => row.difference === one.key && row.amountMinor === one.overMinor) ?? null;
 
 /** What was approved does not change with pieces that are accepted later: the choices stand as they were made. */
 function asApproved(own: readonly Clearance[], live: readonly Difference[]): ReadInvoice['differences'] {
   return own.map((clearance) => {
     const [code = '', seq] = clearance.difference.split(':');
-    const known = live.find((one) => one.key === clearance.difference && one.overMinor === clearance.amountMinor);
-    const named = { key: clearance.difference, code: code as Difference['code'], seq: seq === undefined ? null : Number(seq), overMinor: clearance.amountMinor };
-    return { ...named, sentence: known?.sentence ?? DIFFERENCE_WORDS[named.code] ?? 'Differs from the order.', clearance };
+    const known = live.find(
+      (one) => one.key === clearance.difference && one.overMinor === clearance.amountMinor,
+    );
+    const named = {
+      key: clearance.difference,
+      code: code as Difference['code'],
+      seq: seq === undefined ? null : Number(seq),
+      overMinor: clearance.amountMinor,
+    };
+    return {
+      ...named,
+      sentence: known?.sentence ?? DIFFERENCE_WORDS[named.code] ?? 'Differs from the order.',
+      clearance,
+    };
   });
 }
 
-async function readOrders(ctx: Pick<Ctx, 'tx'>, batchIds: readonly string[]): Promise<Map<string, InvoiceOrder>> {
+async function readOrders(
+  ctx: Pick<Ctx, 'tx'>,
+  batchIds: readonly string[],
+): Promise<Map<string, InvoiceOrder>> {
   const found = await ctx.tx
-    .select({ id: batches.id, currency: batches.currency, lotMinimumMinor: batches.lotMinimumMinor, certificationFeeMinor: batches.certificationFeeMinor })
+    .select({
+      id: batches.id,
+      currency: batches.currency,
+      lotMinimumMinor: batches.lotMinimumMinor,
+      certificationFeeMinor: batches.certificationFeeMinor,
+    })
     .from(batches)
     .where(inArray(batches.id, [...batchIds]));
   const { rows } = await ctx.tx.execute<OrderRow & { batchId: string } & Record<string, unknown>>(sql`
@@ -98,16 +160,32 @@ async function readOrders(ctx: Pick<Ctx, 'tx'>, batchIds: readonly string[]): Pr
         - coalesce((select sum(n.covered_pieces) from nonconformances n where n.line_id = l.id), 0))::int as accepted
     from batch_lines l join lots o on o.id = l.lot_id join parts a on a.id = o.part_id
     where ${inArray(sql`l.batch_id`, [...batchIds])} order by l.batch_id, l.line_no`);
-  return new Map(found.map(({ id, ...terms }) => [id, { ...terms, lines: rows.filter((row) => row.batchId === id).map(({ batchId: _, ...row }) => row) }]));
+  return new Map(
+    found.map(({ id, ...terms }) => [
+      id,
+      { ...terms, lines: rows.filter((row) => row.batchId === id).map(({ batchId: _, ...row }) => row) },
+    ]),
+  );
 }
 
 /** Locks an invoice that may still be changed, at the version the person saw. */
-export async function lockInvoice(ctx: Pick<Ctx, 'tx'>, { invoiceId, version }: { invoiceId: string; version: number }, wanted: 'unapproved' | 'approved'): Promise<ReadInvoice> {
+export async function lockInvoice(
+  ctx: Pick<Ctx, 'tx'>,
+  { invoiceId, version }: { invoiceId: string; version: number },
+  wanted: 'unapproved' | 'approved',
+): Promise<ReadInvoice> {
   const read = await readInvoice(ctx, invoiceId, { lock: true });
   const { invoice } = read;
-  if (invoice.version !== version) throw new AppError('conflict', 'Not saved: the invoice was changed meanwhile. Look at what it is now, then decide again.');
-  if (invoice.refusedAt !== null) throw new AppError('conflict', 'This invoice was refused. A corrected one is entered anew.');
-  if (wanted === 'unapproved' && invoice.approvedAt !== null) throw new AppError('conflict', 'This invoice is approved. What was approved does not change.');
-  if (wanted === 'approved' && invoice.approvedAt === null) throw new AppError('conflict', 'This invoice is not approved yet.');
+  if (invoice.version !== version)
+    throw new AppError(
+      'conflict',
+      'Not saved: the invoice was changed meanwhile. Look at what it is now, then decide again.',
+    );
+  if (invoice.refusedAt !== null)
+    throw new AppError('conflict', 'This invoice was refused. A corrected one is entered anew.');
+  if (wanted === 'unapproved' && invoice.approvedAt !== null)
+    throw new AppError('conflict', 'This invoice is approved. What was approved does not change.');
+  if (wanted === 'approved' && invoice.approvedAt === null)
+    throw new AppError('conflict', 'This invoice is not approved yet.');
   return read;
 }

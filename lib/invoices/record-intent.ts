@@ -22,7 +22,10 @@ export interface IntentNews {
 
 export function newsOf(intent: Stripe.PaymentIntent): IntentNews {
   const charge = typeof intent.latest_charge === 'string' ? null : intent.latest_charge;
-  const states: Partial<Record<Stripe.PaymentIntent.Status, IntentNews['state']>> = { succeeded: 'succeeded', processing: 'processing' };
+  const states: Partial<Record<Stripe.PaymentIntent.Status, IntentNews['state']>> = {
+    succeeded: 'succeeded',
+    processing: 'processing',
+  };
   return {
     intentId: intent.id,
     state: states[intent.status] ?? 'failed',
@@ -40,23 +43,54 @@ export function newsOf(intent: Stripe.PaymentIntent): IntentNews {
  * attempt only: a later attempt on the same intent may have begun since.
  */
 export async function recordIntent(ctx: Ctx, paymentId: string, news: IntentNews): Promise<void> {
-  const [known] = await ctx.tx.select({ invoiceId: payments.invoiceId }).from(payments).where(eq(payments.id, paymentId));
+  const [known] = await ctx.tx
+    .select({ invoiceId: payments.invoiceId })
+    .from(payments)
+    .where(eq(payments.id, paymentId));
   if (!known) return;
-  const [invoice] = await ctx.tx.select().from(invoices).where(eq(invoices.id, known.invoiceId)).for('update');
-  const attempts = await ctx.tx.select().from(payments).where(eq(payments.invoiceId, known.invoiceId)).orderBy(desc(payments.attempt));
+  const [invoice] = await ctx.tx
+    .select()
+    .from(invoices)
+    .where(eq(invoices.id, known.invoiceId))
+    .for('update');
+  const attempts = await ctx.tx
+    .select()
+    .from(payments)
+    .where(eq(payments.invoiceId, known.invoiceId))
+    .orderBy(desc(payments.attempt));
   const heardOf = attempts.find((one) => one.id === paymentId);
   if (!invoice || !heardOf) return;
 
-  if (news.state === 'failed') return recordFailure(ctx, { payment: heardOf, number: invoice.number, intentId: news.intentId, reason: news.reason });
+  if (news.state === 'failed')
+    return recordFailure(ctx, {
+      payment: heardOf,
+      number: invoice.number,
+      intentId: news.intentId,
+      reason: news.reason,
+    });
   const payment = attemptOf(news.intentId, heardOf, attempts);
-  if (payment.state === 'pending' || news.state === 'succeeded') await keepIntent(ctx, payment, news.intentId);
+  if (payment.state === 'pending' || news.state === 'succeeded')
+    await keepIntent(ctx, payment, news.intentId);
   if (news.state === 'processing') return;
   await recordSuccess(ctx, { payment, invoice, news });
   if (news.refundedMinor > 0) await recordRefund(ctx, { payment, invoice, news });
 }
 
 /** An attempt that ended without success; the office sees why and may pay again. */
-export async function recordFailure(ctx: Ctx, { payment, number, intentId, reason }: { payment: Pick<Payment, 'id' | 'invoiceId' | 'attempt'>; number: string | null; intentId: string | null; reason: string }): Promise<void> {
+export async function recordFailure(
+  ctx: Ctx,
+  {
+    payment,
+    number,
+    intentId,
+    reason,
+  }: {
+    payment: Pick<Payment, 'id' | 'invoiceId' | 'attempt'>;
+    number: string | null;
+    intentId: string | null;
+    reason: string;
+  },
+): Promise<void> {
   const [failed] = await ctx.tx
     .update(payments)
     .set({ state: 'failed', failure: reason, endedAt: ctx.now })
@@ -64,16 +98,31 @@ export async function recordFailure(ctx: Ctx, { payment, number, intentId, reaso
     .returning({ id: payments.id });
   if (!failed) return;
   if (intentId !== null) await keepIntent(ctx, payment, intentId);
-  await recordAudit(ctx, { action: 'invoice.payment_failed', entity: 'invoice', entityId: payment.invoiceId, after: { number, attempt: payment.attempt, reason } });
+  await recordAudit(ctx, {
+    action: 'invoice.payment_failed',
+    entity: 'invoice',
+    entityId: payment.invoiceId,
+    after: { number, attempt: payment.attempt, reason },
+  });
 }
 
 /**
  * The intent belongs to the attempt that is under way with it: an intent is paid once, however often it is tried, so
  * no two attempts may claim it.
  */
-export async function keepIntent(ctx: Ctx, { id, invoiceId }: Pick<Payment, 'id' | 'invoiceId'>, intentId: string): Promise<void> {
-  await ctx.tx.update(payments).set({ intentId: null }).where(and(eq(payments.invoiceId, invoiceId), eq(payments.intentId, intentId), ne(payments.id, id)));
-  await ctx.tx.update(payments).set({ intentId }).where(and(eq(payments.id, id), isNull(payments.intentId)));
+export async function keepIntent(
+  ctx: Ctx,
+  { id, invoiceId }: Pick<Payment, 'id' | 'invoiceId'>,
+  intentId: string,
+): Promise<void> {
+  await ctx.tx
+    .update(payments)
+    .set({ intentId: null })
+    .where(and(eq(payments.invoiceId, invoiceId), eq(payments.intentId, intentId), ne(payments.id, id)));
+  await ctx.tx
+    .update(payments)
+    .set({ intentId })
+    .where(and(eq(payments.id, id), isNull(payments.intentId)));
 }
 
 /**
@@ -83,7 +132,11 @@ export async function keepIntent(ctx: Ctx, { id, invoiceId }: Pick<Payment, 'id'
 function attemptOf(intentId: string, heardOf: Payment, attempts: readonly Payment[]): Payment {
   const carrier = attempts.find((one) => one.intentId === intentId) ?? heardOf;
   if (carrier.state !== 'failed') return carrier;
-  return attempts.find((one) => one.state === 'pending' && one.intentId === null && one.attempt > carrier.attempt) ?? carrier;
+  return (
+    attempts.find(
+      (one) => one.state === 'pending' && one.intentId === null && one.attempt > carrier.attempt,
+    ) ?? carrier
+  );
 }
 
 interface Ended {
@@ -99,10 +152,30 @@ async function recordSuccess(ctx: Ctx, { payment, invoice, news }: Ended): Promi
     .where(and(eq(payments.id, payment.id), notInArray(payments.state, ['succeeded', 'refunded'])))
     .returning({ id: payments.id });
   if (!ended) return;
-  await enterMoney(ctx, { invoiceId: invoice.id, kind: 'paid', amountMinor: -news.receivedMinor, currency: payment.currency, cause: `payment:${news.intentId}` });
-  await recordAudit(ctx, { action: 'invoice.paid', entity: 'invoice', entityId: invoice.id, after: { number: invoice.number, paidMinor: news.receivedMinor, attempt: payment.attempt, reference: news.intentId } });
+  await enterMoney(ctx, {
+    invoiceId: invoice.id,
+    kind: 'paid',
+    amountMinor: -news.receivedMinor,
+    currency: payment.currency,
+    cause: `payment:${news.intentId}`,
+  });
+  await recordAudit(ctx, {
+    action: 'invoice.paid',
+    entity: 'invoice',
+    entityId: invoice.id,
+    after: {
+      number: invoice.number,
+      paidMinor: news.receivedMinor,
+      attempt: payment.attempt,
+      reference: news.intentId,
+    },
+  });
   await refreshStanding(ctx, invoice.batchId);
-  await queueRemittance(ctx, { invoiceId: invoice.id, paidMinor: news.receivedMinor, paidBy: payment.paidBy });
+  await queueRemittance(ctx, {
+    invoiceId: invoice.id,
+    paidMinor: news.receivedMinor,
+    paidBy: payment.paidBy,
+  });
 }
 
 /** The service tells the sum of all refunds so far; what is not entered of it yet is entered now. */
@@ -114,8 +187,20 @@ async function recordRefund(ctx: Ctx, { payment, invoice, news }: Ended): Promis
     .where(and(eq(moneyEntries.invoiceId, invoice.id), like(moneyEntries.cause, `${cause}:%`)));
   const amountMinor = news.refundedMinor - (before?.minor ?? 0);
   if (amountMinor <= 0) return;
-  await enterMoney(ctx, { invoiceId: invoice.id, kind: 'refunded', amountMinor, currency: payment.currency, cause: `${cause}:${news.refundedMinor}` });
-  if (news.refundedMinor >= payment.amountMinor) await ctx.tx.update(payments).set({ state: 'refunded' }).where(eq(payments.id, payment.id));
-  await recordAudit(ctx, { action: 'invoice.refunded', entity: 'invoice', entityId: invoice.id, after: { number: invoice.number, refundedMinor: amountMinor, reference: news.intentId } });
+  await enterMoney(ctx, {
+    invoiceId: invoice.id,
+    kind: 'refunded',
+    amountMinor,
+    currency: payment.currency,
+    cause: `${cause}:${news.refundedMinor}`,
+  });
+  if (news.refundedMinor >= payment.amountMinor)
+    await ctx.tx.update(payments).set({ state: 'refunded' }).where(eq(payments.id, payment.id));
+  await recordAudit(ctx, {
+    action: 'invoice.refunded',
+    entity: 'invoice',
+    entityId: invoice.id,
+    after: { number: invoice.number, refundedMinor: amountMinor, reference: news.intentId },
+  });
   await refreshStanding(ctx, invoice.batchId);
 }

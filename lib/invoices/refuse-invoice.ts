@@ -15,8 +15,16 @@ export async function refuseInvoice(ctx: Ctx, input: z.output<(typeof contract.r
   authorize(ctx, 'invoice.approve');
   const { invoice } = await lockInvoice(ctx, input, 'unapproved');
   const version = invoice.version + 1;
-  await ctx.tx.update(invoices).set({ refusedAt: ctx.now, refusedReason: input.reason, version }).where(eq(invoices.id, invoice.id));
-  await recordAudit(ctx, { action: 'invoice.refuse', entity: 'invoice', entityId: invoice.id, after: { number: invoice.number, reason: input.reason } });
+  await ctx.tx
+    .update(invoices)
+    .set({ refusedAt: ctx.now, refusedReason: input.reason, version })
+    .where(eq(invoices.id, invoice.id));
+  await recordAudit(ctx, {
+    action: 'invoice.refuse',
+    entity: 'invoice',
+    entityId: invoice.id,
+    after: { number: invoice.number, reason: input.reason },
+  });
   await refreshStanding(ctx, invoice.batchId);
   return { version };
 }

@@ -22,15 +22,32 @@ interface Given {
 export function remittanceOf({ lines, differences, entries, paidMinor }: Given): Remittance {
   const withheld = differences.filter((one) => one.clearance?.choice === 'withhold' && one.overMinor > 0);
   const paidFor = lines
-    .map((line) => ({ says: line.description, pieces: line.pieces, amountMinor: line.amountMinor - sumOf(withheld.filter((one) => one.seq === line.seq).map((one) => one.overMinor)) }))
+    .map((line) => ({
+      says: line.description,
+      pieces: line.pieces,
+      amountMinor:
+        line.amountMinor - sumOf(withheld.filter((one) => one.seq === line.seq).map((one) => one.overMinor)),
+    }))
     .filter((line) => line.amountMinor !== 0);
-  const credited = sumOf(entries.filter((entry) => entry.kind === 'credited').map((entry) => entry.amountMinor));
+  const credited = sumOf(
+    entries.filter((entry) => entry.kind === 'credited').map((entry) => entry.amountMinor),
+  );
   if (credited !== 0) paidFor.push({ says: 'Your credits', pieces: null, amountMinor: credited });
-  const before = sumOf(entries.filter((entry) => entry.kind === 'paid' || entry.kind === 'refunded').map((entry) => entry.amountMinor)) + paidMinor;
-  if (before !== 0) paidFor.push({ says: before < 0 ? 'Paid before' : 'Returned before', pieces: null, amountMinor: before });
+  const before =
+    sumOf(
+      entries
+        .filter((entry) => entry.kind === 'paid' || entry.kind === 'refunded')
+        .map((entry) => entry.amountMinor),
+    ) + paidMinor;
+  if (before !== 0)
+    paidFor.push({ says: before < 0 ? 'Paid before' : 'Returned before', pieces: null, amountMinor: before });
   const rest = paidMinor - sumOf(paidFor.map((line) => line.amountMinor));
-  if (rest !== 0) paidFor.push({ says: 'Difference between the total and its lines', pieces: null, amountMinor: rest });
-  return { lines: paidFor, withheld: withheld.map((one) => ({ says: one.sentence.replace(/\.$/, ''), amountMinor: one.overMinor })) };
+  if (rest !== 0)
+    paidFor.push({ says: 'Difference between the total and its lines', pieces: null, amountMinor: rest });
+  return {
+    lines: paidFor,
+    withheld: withheld.map((one) => ({ says: one.sentence.replace(/\.$/, ''), amountMinor: one.overMinor })),
+  };
 }
 
 const sumOf = (amounts: readonly number[]): number => amounts.reduce((sum, one) => sum + one, 0);

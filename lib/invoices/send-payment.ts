@@ -7,7 +7,14 @@ import { invoices, payments } from '@/db/schema/money';
 import type { Ctx } from '@/lib/auth/context';
 import { enqueue } from '@/lib/jobs/queue';
 import type { JobTools } from '@/lib/jobs/job';
-import { cancelPaymentIntent, findPaymentIntent, getPaymentIntent, payInvoiceIntent, retryInvoiceIntent, type PaymentAttempt } from '@/lib/payments/payments';
+import {
+  cancelPaymentIntent,
+  findPaymentIntent,
+  getPaymentIntent,
+  payInvoiceIntent,
+  retryInvoiceIntent,
+  type PaymentAttempt,
+} from '@/lib/payments/payments';
 import { lookAgainAt } from '@/lib/payments/look-again-at';
 import { workPaymentEventQueue } from '@/lib/payments/work-payment-event-queue';
 
@@ -35,7 +42,17 @@ export async function sendPayment(tools: JobTools, payload: Payload): Promise<vo
 /** Null once the attempt has ended or is with the service. */
 async function readDue(ctx: Ctx, paymentId: string) {
   const [payment] = await ctx.tx
-    .select({ id: payments.id, shopId: payments.shopId, invoiceId: payments.invoiceId, attempt: payments.attempt, amountMinor: payments.amountMinor, currency: payments.currency, startedAt: payments.startedAt, number: invoices.number, orderNumber: batches.orderNumber })
+    .select({
+      id: payments.id,
+      shopId: payments.shopId,
+      invoiceId: payments.invoiceId,
+      attempt: payments.attempt,
+      amountMinor: payments.amountMinor,
+      currency: payments.currency,
+      startedAt: payments.startedAt,
+      number: invoices.number,
+      orderNumber: batches.orderNumber,
+    })
     .from(payments)
     .innerJoin(invoices, eq(invoices.id, payments.invoiceId))
     .innerJoin(batches, eq(batches.id, invoices.batchId))
@@ -44,7 +61,13 @@ async function readDue(ctx: Ctx, paymentId: string) {
   const [failed] = await ctx.tx
     .select({ intentId: payments.intentId })
     .from(payments)
-    .where(and(eq(payments.invoiceId, payment.invoiceId), eq(payments.state, 'failed'), isNotNull(payments.intentId)))
+    .where(
+      and(
+        eq(payments.invoiceId, payment.invoiceId),
+        eq(payments.state, 'failed'),
+        isNotNull(payments.intentId),
+      ),
+    )
     .orderBy(desc(payments.attempt))
     .limit(1);
   return { ...payment, intentBefore: failed?.intentId ?? null };
@@ -57,8 +80,12 @@ async function handOver(due: Due, payload: Payload): Promise<Outcome> {
   if (due.intentBefore !== null) {
     const before = await getPaymentIntent(due.intentBefore);
     if (before.status === 'succeeded' || before.status === 'processing') return outcomeOf(before);
-    const fits = before.amount === due.amountMinor && before.transfer_data?.destination === payload.destinationAccount;
-    if (fits && before.status !== 'canceled') return refusable(() => retryInvoiceIntent({ intentId: before.id, paymentMethod, idempotencyKey: keyOf(due) }));
+    const fits =
+      before.amount === due.amountMinor && before.transfer_data?.destination === payload.destinationAccount;
+    if (fits && before.status !== 'canceled')
+      return refusable(() =>
+        retryInvoiceIntent({ intentId: before.id, paymentMethod, idempotencyKey: keyOf(due) }),
+      );
     // Another sum or another account is another payment; the old one must never be paid beside it.
     if (before.status !== 'canceled') await cancelPaymentIntent(before.id);
   }
@@ -79,7 +106,8 @@ function requestOf(due: Due, { customer, paymentMethod, destinationAccount }: Pa
 }
 
 /** From the invoice alone for the first attempt; a further one, which only exists after that failed, says which it is. */
-const keyOf = ({ invoiceId, attempt }: Due): string => (attempt === 1 ? `invoice:${invoiceId}` : `invoice:${invoiceId}:${attempt}`);
+const keyOf = ({ invoiceId, attempt }: Due): string =>
+  attempt === 1 ? `invoice:${invoiceId}` : `invoice:${invoiceId}:${attempt}`;
 
 function outcomeOf(intent: Stripe.PaymentIntent): Outcome {
   const { state, intentId, reason } = newsOf(intent);
@@ -91,7 +119,9 @@ async function refusable(work: () => Promise<PaymentAttempt>): Promise<Outcome> 
   try {
     return await work();
   } catch (error) {
-    const isRefusal = error instanceof Stripe.errors.StripeInvalidRequestError || error instanceof Stripe.errors.StripeCardError;
+    const isRefusal =
+      error instanceof Stripe.errors.StripeInvalidRequestError ||
+      error instanceof Stripe.errors.StripeCardError;
     // The intent moved on between two calls; the next try sees where to.
     if (!isRefusal || error.code === 'payment_intent_unexpected_state') throw error;
     return { state: 'refused', intentId: null, reason: error.message };
@@ -101,7 +131,18 @@ async function refusable(work: () => Promise<PaymentAttempt>): Promise<Outcome> 
 /** A success is not written here: it is believed from the signed webhook, or from a later look. */
 async function recordOutcome(ctx: Ctx, due: Due, outcome: Outcome): Promise<void> {
   await ctx.tx.select({ id: invoices.id }).from(invoices).where(eq(invoices.id, due.invoiceId)).for('update');
-  if (outcome.state === 'declined' || outcome.state === 'refused') return recordFailure(ctx, { payment: due, number: due.number, intentId: outcome.intentId, reason: outcome.reason });
+  if (outcome.state === 'declined' || outcome.state === 'refused')
+    return recordFailure(ctx, {
+      payment: due,
+      number: due.number,
+      intentId: outcome.intentId,
+      reason: outcome.reason,
+    });
   await keepIntent(ctx, due, outcome.intentId);
-  await enqueue(ctx, workPaymentEventQueue, { shopId: due.shopId, paymentId: due.id, look: 1 }, { startAfter: lookAgainAt(ctx.now, 0) });
+  await enqueue(
+    ctx,
+    workPaymentEventQueue,
+    { shopId: due.shopId, paymentId: due.id, look: 1 },
+    { startAfter: lookAgainAt(ctx.now, 0) },
+  );
 }

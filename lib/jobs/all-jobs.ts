@@ -6,4 +6,10 @@ import { workPaymentEventJob } from './definitions/work-payment-event';
 import type { Job } from './job';
 
 /** What the worker runs: one job for each queue of `queues.ts`; a test compares the two. */
-export const ALL_JOBS: readonly Job[] = [sendMailJob, renderDocumentsJob, assembleDossierJob, payInvoiceJob, workPaymentEventJob];
+export const ALL_JOBS: readonly Job[] = [
+  sendMailJob,
+  renderDocumentsJob,
+  assembleDossierJob,
+  payInvoiceJob,
+  workPaymentEventJob,
+];

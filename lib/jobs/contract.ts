@@ -24,7 +24,8 @@ export const listFailedJobs = declare({
   id: 'listFailedJobs',
   method: 'get',
   path: '/jobs/failed',
-  summary: 'Background work of the shop that did not succeed: what waits for its next try, and what was given up',
+  summary:
+    'Background work of the shop that did not succeed: what waits for its next try, and what was given up',
   side: 'shop',
   permission: 'jobs.manage',
   input: z.object({}),

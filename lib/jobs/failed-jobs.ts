@@ -24,7 +24,10 @@ type FailedRow = {
 /** The queue is nobody's tenant: the function it is read through (see the migration) tells only of this shop's jobs. */
 export async function listFailedJobs(ctx: Ctx) {
   authorize(ctx, 'jobs.manage');
-  const [shop] = await ctx.tx.select({ zone: shops.zone }).from(shops).where(eq(shops.id, shopOf(ctx)));
+  const [shop] = await ctx.tx
+    .select({ zone: shops.zone })
+    .from(shops)
+    .where(eq(shops.id, shopOf(ctx)));
   const { rows } = await ctx.tx.execute<FailedRow>(sql`select * from failed_jobs()`);
   const jobs = rows.map((row) => ({
     id: row.id,
@@ -43,7 +46,9 @@ export async function listFailedJobs(ctx: Ctx) {
 
 export async function retryJob(ctx: Ctx, { jobId }: { jobId: string }) {
   authorize(ctx, 'jobs.manage');
-  const { rows } = await ctx.tx.execute<{ found: boolean }>(sql`select retry_failed_job(${jobId}::uuid) as found`);
+  const { rows } = await ctx.tx.execute<{ found: boolean }>(
+    sql`select retry_failed_job(${jobId}::uuid) as found`,
+  );
   if (rows[0]?.found !== true) throw notFound('job');
   await recordAudit(ctx, { action: 'job.retry', entity: 'job', entityId: jobId });
   return { done: true as const };

@@ -6,7 +6,17 @@ import { log } from '@/lib/log';
 const PATIENCE_MS = 120_000;
 const LONGEST_PAUSE_MS = 2_000;
 /** What is said when the server is restarting, or its machine is: the same statement works a moment later. */
-const AWAY = new Set(['ECONNREFUSED', 'ECONNRESET', 'EPIPE', 'ETIMEDOUT', '57P01', '57P02', '57P03', '08006', '08003']);
+const AWAY = new Set([
+  'ECONNREFUSED',
+  'ECONNRESET',
+  'EPIPE',
+  'ETIMEDOUT',
+  '57P01',
+  '57P02',
+  '57P03',
+  '08006',
+  '08003',
+]);
 const AWAY_WORDS = /connection terminated|timeout exceeded when trying to connect|connection timeout/i;
 
 interface Answer {

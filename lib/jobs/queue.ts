@@ -43,7 +43,13 @@ export async function enqueue<Payload extends z.ZodType>(
 
 /** Makes the queues' tables and lets the application's roles add to them. Runs as the owner, with the migrations. */
 export async function installQueues(ownerUrl: string): Promise<void> {
-  const boss = new PgBoss({ connectionString: ownerUrl, schema: 'pgboss', supervise: false, schedule: false, max: 2 });
+  const boss = new PgBoss({
+    connectionString: ownerUrl,
+    schema: 'pgboss',
+    supervise: false,
+    schedule: false,
+    max: 2,
+  });
   await boss.start();
   try {
     for (const queue of QUEUES) await boss.createQueue(queue.name);
@@ -66,7 +72,11 @@ export async function installQueues(ownerUrl: string): Promise<void> {
 
 /** pg-boss words its statements with `$1`; Drizzle's transaction takes them as chunks of one template. */
 async function executeIn(tx: Tx, text: string, values: readonly unknown[]): Promise<{ rows: unknown[] }> {
-  const chunks: SQL[] = text.split(/\$(\d+)/).map((chunk, at) => (at % 2 === 0 ? sql.raw(chunk) : sql`${sql.param(prepared(values[Number(chunk) - 1]))}`));
+  const chunks: SQL[] = text
+    .split(/\$(\d+)/)
+    .map((chunk, at) =>
+      at % 2 === 0 ? sql.raw(chunk) : sql`${sql.param(prepared(values[Number(chunk) - 1]))}`,
+    );
   const { rows } = await tx.execute(sql.join(chunks));
   return { rows };
 }

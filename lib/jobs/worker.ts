@@ -16,7 +16,12 @@ import { QUEUES } from './queues';
 async function main(): Promise<void> {
   const { db, pool } = connect(env.DATABASE_URL, 10);
   const queue = patientConnection(env.DATABASE_URL, 6);
-  const boss = new PgBoss({ db: queue, schema: 'pgboss', migrate: false, archiveFailedAfterSeconds: 90 * 24 * 3600 });
+  const boss = new PgBoss({
+    db: queue,
+    schema: 'pgboss',
+    migrate: false,
+    archiveFailedAfterSeconds: 90 * 24 * 3600,
+  });
   boss.on('error', (error) => log.error({ error }, 'queue'));
   await boss.start();
   for (const job of ALL_JOBS) await listen(boss, db, job);
@@ -38,16 +43,34 @@ async function main(): Promise<void> {
 
 async function listen(boss: PgBoss, db: Db, job: Job): Promise<void> {
   for (let lane = 0; lane < job.concurrency; lane++) {
-    await boss.work<unknown>(job.name, { pollingIntervalSeconds: 1, batchSize: 1, includeMetadata: true }, async (taken) => {
-      for (const one of taken) await runJob(db, job, { data: one.data, attempt: one.retryCount + 1, id: one.id });
-    });
+    await boss.work<unknown>(
+      job.name,
+      { pollingIntervalSeconds: 1, batchSize: 1, includeMetadata: true },
+      async (taken) => {
+        for (const one of taken)
+          await runJob(db, job, { data: one.data, attempt: one.retryCount + 1, id: one.id });
+      },
+    );
   }
 }
 
 /** Runs one job as the worker does; tests call it through `runJobs`. */
-export async function runJob(db: Db, job: Job, { data, attempt, id: jobId }: { data: unknown; attempt: number; id: string }): Promise<void> {
+export async function runJob(
+  db: Db,
+  job: Job,
+  { data, attempt, id: jobId }: { data: unknown; attempt: number; id: string },
+): Promise<void> {
   const within = <T>(tenant: Tenant, work: (ctx: Ctx) => Promise<T>): Promise<T> =>
-    withTenant(db, tenant, (tx) => work({ tenant, actor: { kind: 'job', name: job.name, roles: [] }, tx, now: new Date(), requestId: jobId || newId(), address: null }));
+    withTenant(db, tenant, (tx) =>
+      work({
+        tenant,
+        actor: { kind: 'job', name: job.name, roles: [] },
+        tx,
+        now: new Date(),
+        requestId: jobId || newId(),
+        address: null,
+      }),
+    );
   const tools: JobTools = {
     attempt,
     now: () => new Date(),

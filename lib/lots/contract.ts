@@ -13,7 +13,11 @@ import { MOST_ROWS, RawRow } from './import-row';
 export const WHEREABOUTS = ['waiting', 'away', 'care', 'stock'] as const;
 export type Whereabouts = (typeof WHEREABOUTS)[number];
 
-const Heat = z.string('The heat is missing.').trim().min(1, 'The heat is missing. It stands on the mill certificate.').max(60, 'The heat is longer than 60 letters.');
+const Heat = z
+  .string('The heat is missing.')
+  .trim()
+  .min(1, 'The heat is missing. It stands on the mill certificate.')
+  .max(60, 'The heat is longer than 60 letters.');
 const Note = z.string().trim().max(2000, 'Keep the note under 2000 letters.').default('');
 const Serial = z.string().trim().min(1, 'A serial is empty.').max(60, 'A serial is longer than 60 letters.');
 
@@ -85,13 +89,33 @@ export const Lot = z.object({
   createdAt: Moment,
   made: z.int(),
   millCertificate: FileRef.nullable(),
-  route: z.array(z.object({ id: Id, seq: z.int(), process: z.enum(PROCESSES), specification: z.string(), specificationRevision: z.string().nullable(), targetCondition: z.string().nullable() })),
+  route: z.array(
+    z.object({
+      id: Id,
+      seq: z.int(),
+      process: z.enum(PROCESSES),
+      specification: z.string(),
+      specificationRevision: z.string().nullable(),
+      targetCondition: z.string().nullable(),
+    }),
+  ),
   whereabouts: z.array(Spot.extend({ pieces: z.int() })),
   batches: z.array(
-    z.object({ id: Id, number: z.string(), stage: z.enum(STAGES), processor: z.string(), process: z.enum(PROCESSES), pieces: z.int(), dispatchedAt: Moment.nullable(), promisedOn: z.string().nullable() }),
+    z.object({
+      id: Id,
+      number: z.string(),
+      stage: z.enum(STAGES),
+      processor: z.string(),
+      process: z.enum(PROCESSES),
+      pieces: z.int(),
+      dispatchedAt: Moment.nullable(),
+      promisedOn: z.string().nullable(),
+    }),
   ),
   /** Of a serialised lot: each piece by name and where it is. */
-  named: z.array(z.object({ serial: z.string(), place: z.enum(PLACES).nullable(), holder: Holder.nullable() })),
+  named: z.array(
+    z.object({ serial: z.string(), place: z.enum(PLACES).nullable(), holder: Holder.nullable() }),
+  ),
 });
 export type Lot = z.output<typeof Lot>;
 
@@ -164,11 +188,22 @@ export const editLot = declare({
   summary: 'Correct the heat or the note of a lot, or give it its mill certificate',
   side: 'shop',
   permission: 'lot.create',
-  input: z.object({ lotId: Id, version: z.int(), heat: Heat, note: Note, millCertificateFileId: Id.nullable() }),
+  input: z.object({
+    lotId: Id,
+    version: z.int(),
+    heat: Heat,
+    note: Note,
+    millCertificateFileId: Id.nullable(),
+  }),
   response: LotRef,
 });
 
-const Rows = z.object({ rows: z.array(RawRow).min(1, 'The file has no rows.').max(MOST_ROWS, `Import ${MOST_ROWS} rows at most at once. Split the file.`) });
+const Rows = z.object({
+  rows: z
+    .array(RawRow)
+    .min(1, 'The file has no rows.')
+    .max(MOST_ROWS, `Import ${MOST_ROWS} rows at most at once. Split the file.`),
+});
 
 export const checkLotImport = declare({
   id: 'checkLotImport',
@@ -180,7 +215,12 @@ export const checkLotImport = declare({
   input: Rows,
   response: z.object({
     isClean: z.boolean(),
-    rows: z.array(z.object({ problems: z.array(z.object({ field: z.string(), message: z.string() })), part: PartOfLot.nullable() })),
+    rows: z.array(
+      z.object({
+        problems: z.array(z.object({ field: z.string(), message: z.string() })),
+        part: PartOfLot.nullable(),
+      }),
+    ),
   }),
 });
 

@@ -15,6 +15,9 @@ export async function dayMade(ctx: Ctx, day: string): Promise<Date> {
 export const noonOf = (day: string): Date => new Date(`${day}T12:00:00Z`);
 
 async function todayInShop(ctx: Ctx): Promise<string> {
-  const [shop] = await ctx.tx.select({ zone: shops.zone }).from(shops).where(eq(shops.id, shopOf(ctx)));
+  const [shop] = await ctx.tx
+    .select({ zone: shops.zone })
+    .from(shops)
+    .where(eq(shops.id, shopOf(ctx)));
   return calendarDay(ctx.now, shop?.zone ?? 'UTC');
 }

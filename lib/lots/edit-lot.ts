@@ -18,9 +18,17 @@ interface EditLotInput {
 /** Corrects what is written of a lot. Its pieces only move by movements; a mill certificate that is replaced is kept. */
 export async function editLot(ctx: Ctx, { lotId, version, heat, note, millCertificateFileId }: EditLotInput) {
   authorize(ctx, 'lot.create');
-  const [before] = await ctx.tx.select({ heat: lots.heat, note: lots.note, millCertificateFileId: lots.millCertificateFileId }).from(lots).where(eq(lots.id, lotId));
+  const [before] = await ctx.tx
+    .select({ heat: lots.heat, note: lots.note, millCertificateFileId: lots.millCertificateFileId })
+    .from(lots)
+    .where(eq(lots.id, lotId));
   if (!before) throw notFound('lot');
-  if (millCertificateFileId !== null) await requireVerifiedFile(ctx, { fileId: millCertificateFileId, purpose: 'mill_certificate', field: 'millCertificateFileId' });
+  if (millCertificateFileId !== null)
+    await requireVerifiedFile(ctx, {
+      fileId: millCertificateFileId,
+      purpose: 'mill_certificate',
+      field: 'millCertificateFileId',
+    });
   const after = { heat, note: note === '' ? null : note, millCertificateFileId };
   const [lot] = await ctx.tx
     .update(lots)

@@ -6,10 +6,20 @@ import { NO_HOLDER } from '@/lib/ids';
 
 import type { Holder } from './contract';
 
-type HolderRow = { spot: string; kind: Holder['kind']; id: string; says: string; seq: number | null; stage: Stage | null };
+type HolderRow = {
+  spot: string;
+  kind: Holder['kind'];
+  id: string;
+  says: string;
+  seq: number | null;
+  stage: Stage | null;
+};
 
 /** What the holders of pieces are called, by the id that the ledger keeps. A line that was taken out again has no name. */
-export async function namesOfHolders(ctx: Pick<Ctx, 'tx'>, holderIds: readonly (string | null)[]): Promise<ReadonlyMap<string, Holder>> {
+export async function namesOfHolders(
+  ctx: Pick<Ctx, 'tx'>,
+  holderIds: readonly (string | null)[],
+): Promise<ReadonlyMap<string, Holder>> {
   const ids = [...new Set(holderIds.filter((id): id is string => id !== null && id !== NO_HOLDER))];
   if (ids.length === 0) return new Map();
   const { rows } = await ctx.tx.execute<HolderRow>(sql`

@@ -27,16 +27,35 @@ export async function makeLot(ctx: Ctx, { part, serials, ...lot }: NewLot) {
   const shopId = shopOf(ctx);
   const number = lot.number === '' ? await freeNumber(ctx) : lot.number;
   await ctx.tx.insert(lots).values({
-    id, shopId, number, partId: part.id, heat: lot.heat, madeOn: lot.madeOn, serialised: part.serialised,
-    millCertificateFileId: lot.millCertificateFileId, note: lot.note, createdAt: ctx.now,
+    id,
+    shopId,
+    number,
+    partId: part.id,
+    heat: lot.heat,
+    madeOn: lot.madeOn,
+    serialised: part.serialised,
+    millCertificateFileId: lot.millCertificateFileId,
+    note: lot.note,
+    createdAt: ctx.now,
   });
   const named = serials.map((serial) => ({ id: newId(), shopId, lotId: id, serial }));
   if (named.length > 0) await ctx.tx.insert(namedPieces).values(named);
   await movePieces(ctx, {
-    lotId: id, pieces: lot.pieces, from: null, to: { place: 'making', holderId: part.firstStepId }, reason: 'made',
+    lotId: id,
+    pieces: lot.pieces,
+    from: null,
+    to: { place: 'making', holderId: part.firstStepId },
+    reason: 'made',
     ...(named.length > 0 ? { pieceIds: named.map((piece) => piece.id) } : {}),
   });
-  const after = { number, part: `${part.number} rev ${part.revision}`, heat: lot.heat, pieces: lot.pieces, ...(serials.length > 0 ? { serials } : {}), millCertificateFileId: lot.millCertificateFileId };
+  const after = {
+    number,
+    part: `${part.number} rev ${part.revision}`,
+    heat: lot.heat,
+    pieces: lot.pieces,
+    ...(serials.length > 0 ? { serials } : {}),
+    millCertificateFileId: lot.millCertificateFileId,
+  };
   await recordAudit(ctx, { action: 'lot.create', entity: 'lot', entityId: id, after });
   return { id, number, version: 1 };
 }
@@ -53,6 +72,9 @@ async function freeNumber(ctx: Ctx): Promise<string> {
 }
 
 export async function isTaken(ctx: Ctx, number: string): Promise<boolean> {
-  const [taken] = await ctx.tx.select({ one: sql`1` }).from(lots).where(and(eq(lots.shopId, shopOf(ctx)), eq(lots.number, number)));
+  const [taken] = await ctx.tx
+    .select({ one: sql`1` })
+    .from(lots)
+    .where(and(eq(lots.shopId, shopOf(ctx)), eq(lots.number, number)));
   return taken !== undefined;
 }

@@ -15,7 +15,11 @@ import type { Process } from '@/lib/trade/process';
 import { patternsOf } from '@/lib/search/patterns';
 import type { Place } from '@/lib/stock/places';
 
-import type { listLots as listDeclaration, listMovements as movementsDeclaration, Whereabouts } from './contract';
+import type {
+  listLots as listDeclaration,
+  listMovements as movementsDeclaration,
+  Whereabouts,
+} from './contract';
 import { namesOfHolders } from './holders';
 import { madeOfLot, placesOfLot } from './where-pieces-are';
 
@@ -29,7 +33,10 @@ const PLACES_OF: Record<Whereabouts, readonly Place[]> = {
 const partOfLot = { id: parts.id, number: parts.number, revision: parts.revision, name: parts.name };
 
 /** Newest first; ids are time-ordered, so the id is the key of the page. */
-export async function listLots(ctx: Ctx, { after, limit, text, where, partId }: z.output<(typeof listDeclaration)['input']>) {
+export async function listLots(
+  ctx: Ctx,
+  { after, limit, text, where, partId }: z.output<(typeof listDeclaration)['input']>,
+) {
   authorize(ctx, 'lot.read');
   const rows = await ctx.tx
     .select({
@@ -51,7 +58,9 @@ export async function listLots(ctx: Ctx, { after, limit, text, where, partId }: 
       and(
         after === undefined ? undefined : lt(lots.id, after),
         text ? textMatches(text) : undefined,
-        where === undefined ? undefined : sql`exists (select from balances b where b.lot_id = lots.id and b.pieces > 0 and b.place in ${[...PLACES_OF[where]]})`,
+        where === undefined
+          ? undefined
+          : sql`exists (select from balances b where b.lot_id = lots.id and b.pieces > 0 and b.place in ${[...PLACES_OF[where]]})`,
         partId === undefined ? undefined : eq(lots.partId, partId),
       ),
     )
@@ -61,14 +70,32 @@ export async function listLots(ctx: Ctx, { after, limit, text, where, partId }: 
 }
 
 function textMatches(text: string): SQL {
-  const like = (column: SQL) => sql.join(patternsOf(text).map((pattern) => sql`${column} like ${pattern}`), sql` or `);
+  const like = (column: SQL) =>
+    sql.join(
+      patternsOf(text).map((pattern) => sql`${column} like ${pattern}`),
+      sql` or `,
+    );
   return sql`(${like(sql`lots.number`)} or ${like(sql`parts.number`)} or ${like(sql`lots.heat`)})`;
 }
 
 export async function getLot(ctx: Ctx, { lotId }: { lotId: string }) {
   authorize(ctx, 'lot.read');
   const [row] = await ctx.tx
-    .select({ lot: lots, made: madeOfLot, millCertificate: fileRefColumns, part: { ...partOfLot, alloy: parts.alloy, form: parts.form, clad: parts.clad, thickness: parts.thicknessEntered, madeCondition: parts.madeCondition, endCondition: parts.endCondition, supersededAt: parts.supersededAt } })
+    .select({
+      lot: lots,
+      made: madeOfLot,
+      millCertificate: fileRefColumns,
+      part: {
+        ...partOfLot,
+        alloy: parts.alloy,
+        form: parts.form,
+        clad: parts.clad,
+        thickness: parts.thicknessEntered,
+        madeCondition: parts.madeCondition,
+        endCondition: parts.endCondition,
+        supersededAt: parts.supersededAt,
+      },
+    })
     .from(lots)
     .innerJoin(parts, eq(parts.id, lots.partId))
     .leftJoin(files, eq(files.id, lots.millCertificateFileId))
@@ -80,8 +107,17 @@ export async function getLot(ctx: Ctx, { lotId }: { lotId: string }) {
     .from(balances)
     .where(and(eq(balances.lotId, lotId), sql`${balances.pieces} > 0`))
     .orderBy(balances.place);
-  const named = lot.serialised ? await ctx.tx.select({ serial: pieces.serial, place: pieces.place, holderId: pieces.holderId }).from(pieces).where(eq(pieces.lotId, lotId)).orderBy(pieces.serial) : [];
-  const names = await namesOfHolders(ctx, spots.map(({ holderId }) => holderId));
+  const named = lot.serialised
+    ? await ctx.tx
+        .select({ serial: pieces.serial, place: pieces.place, holderId: pieces.holderId })
+        .from(pieces)
+        .where(eq(pieces.lotId, lotId))
+        .orderBy(pieces.serial)
+    : [];
+  const names = await namesOfHolders(
+    ctx,
+    spots.map(({ holderId }) => holderId),
+  );
   const holderOf = (id: string | null) => (id === null ? null : (names.get(id) ?? null));
   return {
     ...lot,
@@ -95,14 +131,30 @@ export async function getLot(ctx: Ctx, { lotId }: { lotId: string }) {
 
 const routeOf = (ctx: Ctx, partId: string) =>
   ctx.tx
-    .select({ id: routeSteps.id, seq: routeSteps.seq, process: routeSteps.process, specification: routeSteps.specification, specificationRevision: routeSteps.specificationRevision, targetCondition: routeSteps.targetCondition })
+    .select({
+      id: routeSteps.id,
+      seq: routeSteps.seq,
+      process: routeSteps.process,
+      specification: routeSteps.specification,
+      specificationRevision: routeSteps.specificationRevision,
+      targetCondition: routeSteps.targetCondition,
+    })
     .from(routeSteps)
     .where(eq(routeSteps.partId, partId))
     .orderBy(routeSteps.seq);
 
 const batchesOf = (ctx: Ctx, lotId: string) =>
   ctx.tx
-    .select({ id: batches.id, number: batches.number, stage: batches.stage, processor: processors.name, process: batches.process, pieces: sql<number>`sum(${batchLines.pieces})::int`, dispatchedAt: batches.dispatchedAt, promisedOn: batches.promisedOn })
+    .select({
+      id: batches.id,
+      number: batches.number,
+      stage: batches.stage,
+      processor: processors.name,
+      process: batches.process,
+      pieces: sql<number>`sum(${batchLines.pieces})::int`,
+      dispatchedAt: batches.dispatchedAt,
+      promisedOn: batches.promisedOn,
+    })
     .from(batchLines)
     .innerJoin(batches, eq(batches.id, batchLines.batchId))
     .innerJoin(processors, eq(processors.id, batches.processorId))
@@ -111,7 +163,10 @@ const batchesOf = (ctx: Ctx, lotId: string) =>
     .orderBy(desc(batches.id));
 
 /** Newest first. Movements are only ever added, so their time-ordered ids keep the order they were written in. */
-export async function listMovements(ctx: Ctx, { lotId, after, limit }: z.output<(typeof movementsDeclaration)['input']>) {
+export async function listMovements(
+  ctx: Ctx,
+  { lotId, after, limit }: z.output<(typeof movementsDeclaration)['input']>,
+) {
   authorize(ctx, 'lot.read');
   const rows = await ctx.tx
     .select()
@@ -120,8 +175,14 @@ export async function listMovements(ctx: Ctx, { lotId, after, limit }: z.output<
     .orderBy(desc(movements.id))
     .limit(limit + 1);
   const { rows: shown, next } = toPage(rows, limit, (row) => row.id);
-  const names = await namesOfHolders(ctx, shown.flatMap(({ fromHolderId, toHolderId }) => [fromHolderId, toHolderId]));
-  const serials = await serialsOf(ctx, shown.flatMap(({ pieceIds }) => pieceIds ?? []));
+  const names = await namesOfHolders(
+    ctx,
+    shown.flatMap(({ fromHolderId, toHolderId }) => [fromHolderId, toHolderId]),
+  );
+  const serials = await serialsOf(
+    ctx,
+    shown.flatMap(({ pieceIds }) => pieceIds ?? []),
+  );
   return {
     next,
     rows: shown.map((row) => ({
@@ -129,7 +190,10 @@ export async function listMovements(ctx: Ctx, { lotId, after, limit }: z.output<
       at: row.movedAt,
       by: row.movedBy,
       pieces: row.pieces,
-      from: row.fromPlace === null ? null : { place: row.fromPlace, holder: names.get(row.fromHolderId ?? '') ?? null },
+      from:
+        row.fromPlace === null
+          ? null
+          : { place: row.fromPlace, holder: names.get(row.fromHolderId ?? '') ?? null },
       to: { place: row.toPlace, holder: names.get(row.toHolderId) ?? null },
       reason: row.reason,
       note: row.note,
@@ -140,6 +204,9 @@ export async function listMovements(ctx: Ctx, { lotId, after, limit }: z.output<
 
 async function serialsOf(ctx: Ctx, pieceIds: readonly string[]): Promise<ReadonlyMap<string, string>> {
   if (pieceIds.length === 0) return new Map();
-  const rows = await ctx.tx.select({ id: pieces.id, serial: pieces.serial }).from(pieces).where(inArray(pieces.id, [...new Set(pieceIds)]));
+  const rows = await ctx.tx
+    .select({ id: pieces.id, serial: pieces.serial })
+    .from(pieces)
+    .where(inArray(pieces.id, [...new Set(pieceIds)]));
   return new Map(rows.map(({ id, serial }) => [id, serial]));
 }

@@ -20,7 +20,10 @@ interface MailToQueue<T extends MailTemplate> {
  * Queues a mail in the transaction that causes it, so that it goes if and only if that commits. In a shop's
  * transaction it goes in the shop's name and answers reach the shop; at the door it belongs to nobody.
  */
-export async function queueMail<T extends MailTemplate>(ctx: Pick<Ctx, 'tx' | 'tenant' | 'actor'>, mail: MailToQueue<T>): Promise<void> {
+export async function queueMail<T extends MailTemplate>(
+  ctx: Pick<Ctx, 'tx' | 'tenant' | 'actor'>,
+  mail: MailToQueue<T>,
+): Promise<void> {
   const shopId = ctx.tenant.kind === 'shop' ? ctx.tenant.shopId : null;
   const replyTo = mail.replyTo === undefined ? await shopReplyAddress(ctx) : mail.replyTo;
   await enqueue(ctx, sendMailQueue, {

@@ -22,7 +22,11 @@ const TEXT: Parameters<typeof toPlainText>[1] = {
   wordwrap: 78,
   selectors: [
     { selector: 'h1', format: 'heading', options: { uppercase: false } },
-    { selector: '[data-text-format="dataTable"]', format: 'dataTable', options: { uppercaseHeaderCells: false, maxColumnWidth: 38, colSpacing: 2 } },
+    {
+      selector: '[data-text-format="dataTable"]',
+      format: 'dataTable',
+      options: { uppercaseHeaderCells: false, maxColumnWidth: 38, colSpacing: 2 },
+    },
   ],
 };
 

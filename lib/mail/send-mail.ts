@@ -51,7 +51,8 @@ export async function sendMail(mail: Mail, transport: MailTransport = mailTransp
     })),
   });
   // With several recipients the server may take some and refuse others; that is not "sent".
-  if (sent.rejected.length > 0) throw new Error(`The mail server refused ${sent.rejected.length} of the recipients.`);
+  if (sent.rejected.length > 0)
+    throw new Error(`The mail server refused ${sent.rejected.length} of the recipients.`);
 }
 
 /** Whether the mail server answers and lets us in. Throws if not. */

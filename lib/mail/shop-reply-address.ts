@@ -11,7 +11,13 @@ export async function shopReplyAddress(ctx: Pick<Ctx, 'tx' | 'tenant' | 'actor'>
     .select({ email: users.email })
     .from(memberships)
     .innerJoin(users, eq(users.id, memberships.userId))
-    .where(and(eq(memberships.active, true), eq(users.active, true), personId === null ? sql`'admin' = any(${memberships.roles})` : eq(users.id, personId)))
+    .where(
+      and(
+        eq(memberships.active, true),
+        eq(users.active, true),
+        personId === null ? sql`'admin' = any(${memberships.roles})` : eq(users.id, personId),
+      ),
+    )
     .orderBy(asc(memberships.id))
     .limit(1);
   return found?.email ?? null;

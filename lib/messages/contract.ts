@@ -7,7 +7,11 @@ export const MESSAGE_KINDS = ['question', 'answer', 'trouble', 'note'] as const;
 export type MessageKind = (typeof MESSAGE_KINDS)[number];
 export type MessageSide = 'shop' | 'processor';
 
-export const MessageBody = z.string().trim().min(1, 'Write something first.').max(4000, 'Write 4000 characters or less.');
+export const MessageBody = z
+  .string()
+  .trim()
+  .min(1, 'Write something first.')
+  .max(4000, 'Write 4000 characters or less.');
 
 /** One thing that was said on a batch, by either side. */
 export const MessageView = z.object({

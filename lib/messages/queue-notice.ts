@@ -30,7 +30,12 @@ export async function queueNotice(ctx: Ctx, batchId: string, notice: Notice): Pr
     template: notice.kind === 'trouble' ? 'trouble' : 'message',
     to,
     ...(toShop ? { replyTo: batch.deskEmail } : {}),
-    props: { ...ofBatchProps(ctx, batch), ...notice, stage: batch.stage, url: toShop ? `${env.APP_URL}/batches/${batchId}#messages` : await pageUrl(ctx, batch) },
+    props: {
+      ...ofBatchProps(ctx, batch),
+      ...notice,
+      stage: batch.stage,
+      url: toShop ? `${env.APP_URL}/batches/${batchId}#messages` : await pageUrl(ctx, batch),
+    },
   });
 }
 
@@ -40,12 +45,20 @@ async function shopReaders(ctx: Ctx, batch: BatchForMail): Promise<string[]> {
     .select({ id: users.id, email: users.email })
     .from(memberships)
     .innerJoin(users, eq(users.id, memberships.userId))
-    .where(and(eq(memberships.active, true), eq(users.active, true), sql`${memberships.roles} && array['lead', 'admin']`))
+    .where(
+      and(
+        eq(memberships.active, true),
+        eq(users.active, true),
+        sql`${memberships.roles} && array['lead', 'admin']`,
+      ),
+    )
     .orderBy(asc(memberships.id));
   const sender = people.find((person) => person.id === batch.dispatchedBy);
   return sender ? [sender.email] : people.map((person) => person.email);
 }
 
 async function pageUrl(ctx: Ctx, batch: BatchForMail): Promise<string | null> {
-  return LINK_ENDS_AT.includes(batch.stage) ? null : standingBatchUrl(ctx, { batchId: batch.id, processorId: batch.processorId });
+  return LINK_ENDS_AT.includes(batch.stage)
+    ? null
+    : standingBatchUrl(ctx, { batchId: batch.id, processorId: batch.processorId });
 }

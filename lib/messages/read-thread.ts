@@ -21,9 +21,17 @@ export async function readThread(ctx: Ctx, batchId: string) {
     .from(messages)
     .where(eq(messages.batchId, batchId))
     .orderBy(asc(messages.createdAt), asc(messages.id));
-  const lines = await ctx.tx.select({ id: batchLines.id, lineNo: batchLines.lineNo, frozen: batchLines.frozen }).from(batchLines).where(eq(batchLines.batchId, batchId)).orderBy(asc(batchLines.lineNo));
+  const lines = await ctx.tx
+    .select({ id: batchLines.id, lineNo: batchLines.lineNo, frozen: batchLines.frozen })
+    .from(batchLines)
+    .where(eq(batchLines.batchId, batchId))
+    .orderBy(asc(batchLines.lineNo));
   return {
     messages: said.map((message) => ({ ...message, side: message.side as MessageSide })),
-    lines: lines.map(({ id, lineNo, frozen }) => ({ id, lineNo, part: frozen === null ? '' : `${frozen.partNumber} ${frozen.partRevision}` })),
+    lines: lines.map(({ id, lineNo, frozen }) => ({
+      id,
+      lineNo,
+      part: frozen === null ? '' : `${frozen.partNumber} ${frozen.partRevision}`,
+    })),
   };
 }

@@ -27,7 +27,9 @@ const SHORT: Partial<Record<Disposition, DispositionRule>> = {
 };
 
 /** What is over was never the shop's. It only goes back. */
-const OVER: Partial<Record<Disposition, DispositionRule>> = { return_to_processor: { authority: false, file: false, to: null } };
+const OVER: Partial<Record<Disposition, DispositionRule>> = {
+  return_to_processor: { authority: false, file: false, to: null },
+};
 
 export function allowedDispositions(kind: NonconformanceKind): Disposition[] {
   return Object.keys(rulesOf(kind)) as Disposition[];

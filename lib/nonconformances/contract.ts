@@ -7,7 +7,8 @@ import { STAGES } from '@/lib/batches/stage';
 import { DISPOSITIONS } from './disposition';
 import { NONCONFORMANCE_KINDS, RAISED_KINDS } from './kind';
 
-const Words = (name: string, most: number) => z.string().trim().max(most, `${name}: write ${most} characters or less.`);
+const Words = (name: string, most: number) =>
+  z.string().trim().max(most, `${name}: write ${most} characters or less.`);
 
 export const NonconformanceRow = z.object({
   id: Id,
@@ -65,7 +66,14 @@ export const NonconformanceDetail = NonconformanceRow.extend({
   /** Pieces of the line that are still away: what a short count can be written off from. */
   away: z.int(),
   coveredPieces: z.int(),
-  requirement: z.object({ characteristic: z.string(), limit: z.string(), unit: z.string(), stated: z.string().nullable() }).nullable(),
+  requirement: z
+    .object({
+      characteristic: z.string(),
+      limit: z.string(),
+      unit: z.string(),
+      stated: z.string().nullable(),
+    })
+    .nullable(),
   certificate: z.object({ id: Id, number: z.string().nullable() }).nullable(),
   /** How often pieces of this lot were already sent through this step again. */
   reprocessedBefore: z.int(),

@@ -51,10 +51,18 @@ const rowsOf = (ctx: Ctx) =>
     .innerJoin(parts, eq(parts.id, lots.partId));
 
 /** What waits for a decision first. The key of a page says in which of the two halves it ended. */
-export async function listNonconformances(ctx: Ctx, { after, limit, batchId }: z.output<(typeof declaration)['input']>) {
+export async function listNonconformances(
+  ctx: Ctx,
+  { after, limit, batchId }: z.output<(typeof declaration)['input']>,
+) {
   authorize(ctx, 'nonconformance.read');
   const rows = await rowsOf(ctx)
-    .where(and(batchId === undefined ? undefined : eq(nonconformances.batchId, batchId), after === undefined ? undefined : isAfter(after)))
+    .where(
+      and(
+        batchId === undefined ? undefined : eq(nonconformances.batchId, batchId),
+        after === undefined ? undefined : isAfter(after),
+      ),
+    )
     .orderBy(isClosed, sql`${nonconformances.id} desc`)
     .limit(limit + 1);
   return toPage(rows, limit, (row) => `${row.closedAt === null ? 'open' : 'closed'}.${row.id}`);
@@ -63,7 +71,9 @@ export async function listNonconformances(ctx: Ctx, { after, limit, batchId }: z
 function isAfter(key: string): SQL {
   const [half, id] = key.split('.');
   if (id === undefined || !/^[0-9a-f-]{36}$/.test(id)) return sql`false`;
-  return half === 'open' ? sql`(${isClosed} or ${nonconformances.id} < ${id})` : sql`(${isClosed} and ${nonconformances.id} < ${id})`;
+  return half === 'open'
+    ? sql`(${isClosed} or ${nonconformances.id} < ${id})`
+    : sql`(${isClosed} and ${nonconformances.id} < ${id})`;
 }
 
 export async function getNonconformance(ctx: Ctx, { nonconformanceId }: { nonconformanceId: string }) {
@@ -71,7 +81,15 @@ export async function getNonconformance(ctx: Ctx, { nonconformanceId }: { noncon
   const [row] = await rowsOf(ctx).where(eq(nonconformances.id, nonconformanceId));
   if (!row) throw notFound('nonconformance');
   const [more] = await ctx.tx
-    .select({ version: nonconformances.version, lineId: nonconformances.lineId, lotId: nonconformances.lotId, coveredPieces: nonconformances.coveredPieces, requirementId: nonconformances.requirementId, certificateId: nonconformances.certificateId, orderNumber: batches.orderNumber })
+    .select({
+      version: nonconformances.version,
+      lineId: nonconformances.lineId,
+      lotId: nonconformances.lotId,
+      coveredPieces: nonconformances.coveredPieces,
+      requirementId: nonconformances.requirementId,
+      certificateId: nonconformances.certificateId,
+      orderNumber: batches.orderNumber,
+    })
     .from(nonconformances)
     .innerJoin(batches, eq(batches.id, nonconformances.batchId))
     .where(eq(nonconformances.id, nonconformanceId));
@@ -90,7 +108,14 @@ export async function getNonconformance(ctx: Ctx, { nonconformanceId }: { noncon
     onHold: await heldFor(ctx, more.lotId, nonconformanceId),
     ...(await evidenceOf(ctx, more)),
     reprocessedBefore: await reprocessedBefore(ctx, more.lotId, line.stepId),
-    heldPieces: line.serialised ? await namedPiecesOf(ctx, row.kind === 'short' ? { places: AWAY_PLACES, holderId: more.lineId } : { places: ['hold'], holderId: nonconformanceId }) : [],
+    heldPieces: line.serialised
+      ? await namedPiecesOf(
+          ctx,
+          row.kind === 'short'
+            ? { places: AWAY_PLACES, holderId: more.lineId }
+            : { places: ['hold'], holderId: nonconformanceId },
+        )
+      : [],
     dispositions: await dispositionsOf(ctx, nonconformanceId),
   };
 }
@@ -99,29 +124,61 @@ async function heldFor(ctx: Ctx, lotId: string, nonconformanceId: string): Promi
   const [held] = await ctx.tx
     .select({ pieces: balances.pieces })
     .from(balances)
-    .where(and(eq(balances.lotId, lotId), eq(balances.place, 'hold'), eq(balances.holderId, nonconformanceId)));
+    .where(
+      and(eq(balances.lotId, lotId), eq(balances.place, 'hold'), eq(balances.holderId, nonconformanceId)),
+    );
   return held?.pieces ?? 0;
 }
 
-async function evidenceOf(ctx: Ctx, { requirementId, certificateId }: { requirementId: string | null; certificateId: string | null }) {
+async function evidenceOf(
+  ctx: Ctx,
+  { requirementId, certificateId }: { requirementId: string | null; certificateId: string | null },
+) {
   const [requirement] =
     requirementId === null
       ? []
-      : await ctx.tx.select({ characteristic: requirements.characteristic, limit: requirements.limit, unit: requirements.unit }).from(requirements).where(eq(requirements.id, requirementId));
-  const [certificate] = certificateId === null ? [] : await ctx.tx.select({ id: certificates.id, number: certificates.number }).from(certificates).where(eq(certificates.id, certificateId));
+      : await ctx.tx
+          .select({
+            characteristic: requirements.characteristic,
+            limit: requirements.limit,
+            unit: requirements.unit,
+          })
+          .from(requirements)
+          .where(eq(requirements.id, requirementId));
+  const [certificate] =
+    certificateId === null
+      ? []
+      : await ctx.tx
+          .select({ id: certificates.id, number: certificates.number })
+          .from(certificates)
+          .where(eq(certificates.id, certificateId));
   const [decision] =
     requirementId === null || certificateId === null
       ? []
-      : await ctx.tx.select({ stated: decisions.stated }).from(decisions).where(and(eq(decisions.requirementId, requirementId), eq(decisions.certificateId, certificateId)));
-  return { requirement: requirement ? { ...requirement, stated: decision?.stated ?? null } : null, certificate: certificate ?? null };
+      : await ctx.tx
+          .select({ stated: decisions.stated })
+          .from(decisions)
+          .where(and(eq(decisions.requirementId, requirementId), eq(decisions.certificateId, certificateId)));
+  return {
+    requirement: requirement ? { ...requirement, stated: decision?.stated ?? null } : null,
+    certificate: certificate ?? null,
+  };
 }
 
 async function reprocessedBefore(ctx: Ctx, lotId: string, stepId: string): Promise<number> {
-  const { rows } = await ctx.tx.execute<{ times: number }>(sql`select count(*)::int as times from movements where lot_id = ${lotId} and reason = 'reprocess' and to_holder_id = ${stepId}`);
+  const { rows } = await ctx.tx.execute<{ times: number }>(
+    sql`select count(*)::int as times from movements where lot_id = ${lotId} and reason = 'reprocess' and to_holder_id = ${stepId}`,
+  );
   return rows[0]?.times ?? 0;
 }
 
-async function namedPiecesOf(ctx: Ctx, { places, holderId }: { places: readonly ('hold' | 'quarantine' | (typeof AWAY_PLACES)[number])[]; holderId: string }) {
+async function namedPiecesOf(
+  ctx: Ctx,
+  {
+    places,
+    holderId,
+  }: { places: readonly ('hold' | 'quarantine' | (typeof AWAY_PLACES)[number])[]; holderId: string },
+) {
   return ctx.tx
     .select({ id: namedPieces.id, serial: namedPieces.serial })
     .from(namedPieces)
@@ -131,12 +188,25 @@ async function namedPiecesOf(ctx: Ctx, { places, holderId }: { places: readonly 
 
 async function dispositionsOf(ctx: Ctx, nonconformanceId: string) {
   const rows = await ctx.tx
-    .select({ id: dispositions.id, disposition: dispositions.disposition, pieces: dispositions.pieces, reason: dispositions.reason, authority: dispositions.authority, fileId: files.id, fileName: files.name, decidedBy: dispositions.decidedBy, decidedAt: dispositions.decidedAt })
+    .select({
+      id: dispositions.id,
+      disposition: dispositions.disposition,
+      pieces: dispositions.pieces,
+      reason: dispositions.reason,
+      authority: dispositions.authority,
+      fileId: files.id,
+      fileName: files.name,
+      decidedBy: dispositions.decidedBy,
+      decidedAt: dispositions.decidedAt,
+    })
     .from(dispositions)
     .leftJoin(files, eq(files.id, dispositions.fileId))
     .where(eq(dispositions.nonconformanceId, nonconformanceId))
     .orderBy(asc(dispositions.decidedAt), asc(dispositions.id));
-  return rows.map(({ fileId, fileName, ...row }) => ({ ...row, file: fileId === null || fileName === null ? null : { id: fileId, name: fileName } }));
+  return rows.map(({ fileId, fileName, ...row }) => ({
+    ...row,
+    file: fileId === null || fileName === null ? null : { id: fileId, name: fileName },
+  }));
 }
 
 /** What of a batch can be held now. */

@@ -25,7 +25,11 @@ export async function raiseNonconformance(ctx: Ctx, input: Input) {
   if (!line) throw notFound('line');
   if (input.pieces > line.inQuarantine) throw tooMany(line);
   if (line.serialised && input.pieceIds.length !== input.pieces) {
-    throw new AppError('bad_input', `Line ${line.lineNo}, ${line.partNumber}: tick the serial number of each of the ${input.pieces} pieces.`, { fields: [{ field: 'pieceIds', message: `${input.pieceIds.length} ticked. Tick ${input.pieces}.` }] });
+    throw new AppError(
+      'bad_input',
+      `Line ${line.lineNo}, ${line.partNumber}: tick the serial number of each of the ${input.pieces} pieces.`,
+      { fields: [{ field: 'pieceIds', message: `${input.pieceIds.length} ticked. Tick ${input.pieces}.` }] },
+    );
   }
   await refuseForeignEvidence(ctx, input);
 
@@ -54,19 +58,42 @@ export async function raiseNonconformance(ctx: Ctx, input: Input) {
   return opened;
 }
 
-function tooMany({ lineNo, partNumber, inQuarantine }: { lineNo: number; partNumber: string; inQuarantine: number }): AppError {
-  const message = inQuarantine === 0 ? 'Nothing of it is in quarantine, so nothing can be held.' : `${inQuarantine} in quarantine. Enter ${inQuarantine} or less.`;
-  return new AppError('bad_input', `Line ${lineNo}, ${partNumber}: ${message}`, { fields: [{ field: 'pieces', message }] });
+function tooMany({
+  lineNo,
+  partNumber,
+  inQuarantine,
+}: {
+  lineNo: number;
+  partNumber: string;
+  inQuarantine: number;
+}): AppError {
+  const message =
+    inQuarantine === 0
+      ? 'Nothing of it is in quarantine, so nothing can be held.'
+      : `${inQuarantine} in quarantine. Enter ${inQuarantine} or less.`;
+  return new AppError('bad_input', `Line ${lineNo}, ${partNumber}: ${message}`, {
+    fields: [{ field: 'pieces', message }],
+  });
 }
 
 /** The requirement and the certificate it points at must be of the same batch. */
-async function refuseForeignEvidence(ctx: Ctx, { batchId, lineId, requirementId, certificateId }: Input): Promise<void> {
+async function refuseForeignEvidence(
+  ctx: Ctx,
+  { batchId, lineId, requirementId, certificateId }: Input,
+): Promise<void> {
   if (requirementId !== null) {
-    const [requirement] = await ctx.tx.select({ lineId: requirements.lineId }).from(requirements).where(and(eq(requirements.id, requirementId), eq(requirements.batchId, batchId)));
-    if (!requirement || (requirement.lineId !== null && requirement.lineId !== lineId)) throw notFound('requirement');
+    const [requirement] = await ctx.tx
+      .select({ lineId: requirements.lineId })
+      .from(requirements)
+      .where(and(eq(requirements.id, requirementId), eq(requirements.batchId, batchId)));
+    if (!requirement || (requirement.lineId !== null && requirement.lineId !== lineId))
+      throw notFound('requirement');
   }
   if (certificateId !== null) {
-    const [certificate] = await ctx.tx.select({ id: certificates.id }).from(certificates).where(and(eq(certificates.id, certificateId), eq(certificates.batchId, batchId)));
+    const [certificate] = await ctx.tx
+      .select({ id: certificates.id })
+      .from(certificates)
+      .where(and(eq(certificates.id, certificateId), eq(certificates.batchId, batchId)));
     if (!certificate) throw notFound('certificate');
   }
 }

@@ -19,7 +19,10 @@ async function take(ctx: Ctx, kind: string): Promise<number> {
   const [row] = await ctx.tx
     .insert(counters)
     .values({ shopId: shopOf(ctx), kind, next: 2 })
-    .onConflictDoUpdate({ target: [counters.shopId, counters.kind], set: { next: sql`${counters.next} + 1` } })
+    .onConflictDoUpdate({
+      target: [counters.shopId, counters.kind],
+      set: { next: sql`${counters.next} + 1` },
+    })
     .returning({ next: counters.next });
   if (!row) throw new Error('counter gave nothing');
   return row.next - 1;

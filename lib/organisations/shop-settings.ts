@@ -27,13 +27,19 @@ const columns = {
 
 export async function getShopSettings(ctx: Ctx) {
   authorize(ctx, 'shop.read');
-  const [shop] = await ctx.tx.select(columns).from(shops).where(eq(shops.id, shopOf(ctx)));
+  const [shop] = await ctx.tx
+    .select(columns)
+    .from(shops)
+    .where(eq(shops.id, shopOf(ctx)));
   if (!shop) throw notFound('shop');
   return { ...shop, currency: Currency.parse(shop.currency) };
 }
 
 /** Batches, orders and invoices that exist keep the currency, prefix and policies they were made under. */
-export async function updateShopSettings(ctx: Ctx, { version, ...wanted }: z.output<(typeof declaration)['input']>) {
+export async function updateShopSettings(
+  ctx: Ctx,
+  { version, ...wanted }: z.output<(typeof declaration)['input']>,
+) {
   authorize(ctx, 'shop.settings');
   const before = await getShopSettings(ctx);
   const [shop] = await ctx.tx
@@ -42,7 +48,9 @@ export async function updateShopSettings(ctx: Ctx, { version, ...wanted }: z.out
     .where(and(eq(shops.id, shopOf(ctx)), eq(shops.version, version)))
     .returning({ version: shops.version });
   if (!shop) throw changedMeanwhile('settings of the shop');
-  const names = (Object.keys(wanted) as (keyof typeof wanted)[]).filter((name) => JSON.stringify(before[name]) !== JSON.stringify(wanted[name]));
+  const names = (Object.keys(wanted) as (keyof typeof wanted)[]).filter(
+    (name) => JSON.stringify(before[name]) !== JSON.stringify(wanted[name]),
+  );
   await recordAudit(ctx, {
     action: 'shop.change_settings',
     entity: 'shop',

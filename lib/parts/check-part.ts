@@ -12,10 +12,24 @@ export async function checkPart(ctx: Ctx, input: PartInput, partId?: string): Pr
   const [same] = await ctx.tx
     .select({ id: parts.id, name: parts.name })
     .from(parts)
-    .where(and(eq(parts.number, input.number), eq(parts.revision, input.revision), partId === undefined ? undefined : ne(parts.id, partId)));
+    .where(
+      and(
+        eq(parts.number, input.number),
+        eq(parts.revision, input.revision),
+        partId === undefined ? undefined : ne(parts.id, partId),
+      ),
+    );
   if (same) {
     const message = `${input.number} rev ${input.revision} is here already: ${same.name}. Open that one, or enter another revision.`;
-    throw new AppError('conflict', message, { fields: [{ field: 'revision', message }], extra: { partId: same.id } });
+    throw new AppError('conflict', message, {
+      fields: [{ field: 'revision', message }],
+      extra: { partId: same.id },
+    });
   }
-  if (input.drawingFileId !== null) await requireVerifiedFile(ctx, { fileId: input.drawingFileId, purpose: 'drawing', field: 'drawingFileId' });
+  if (input.drawingFileId !== null)
+    await requireVerifiedFile(ctx, {
+      fileId: input.drawingFileId,
+      purpose: 'drawing',
+      field: 'drawingFileId',
+    });
 }

@@ -8,8 +8,14 @@ import { readMeasure, type Quantity } from './measure';
 import { PROCESSES, PRODUCT_FORMS } from '@/lib/trade/process';
 import { ToProve } from './to-prove';
 
-const must = (name: string, longest: number) => z.string(`${name} is missing.`).trim().min(1, `${name} is missing.`).max(longest, `${name} is longer than ${longest} letters.`);
-const may = (name: string, longest: number) => z.string().trim().max(longest, `${name} is longer than ${longest} letters.`).default('');
+const must = (name: string, longest: number) =>
+  z
+    .string(`${name} is missing.`)
+    .trim()
+    .min(1, `${name} is missing.`)
+    .max(longest, `${name} is longer than ${longest} letters.`);
+const may = (name: string, longest: number) =>
+  z.string().trim().max(longest, `${name} is longer than ${longest} letters.`).default('');
 
 /** Kept as it was typed, with its unit; empty where it is not given. */
 const measure = (quantity: Quantity, name: string) =>
@@ -96,7 +102,13 @@ export const RouteStep = z.object({
 });
 export type RouteStep = z.output<typeof RouteStep>;
 
-export const FileRef = z.object({ id: Id, name: z.string(), size: z.int(), mediaType: z.string(), sha256: z.string().nullable() });
+export const FileRef = z.object({
+  id: Id,
+  name: z.string(),
+  size: z.int(),
+  mediaType: z.string(),
+  sha256: z.string().nullable(),
+});
 
 export const Part = z.object({
   id: Id,
@@ -121,11 +133,30 @@ export const Part = z.object({
   createdAt: Moment,
   drawing: FileRef.nullable(),
   route: z.array(RouteStep),
-  revisions: z.array(z.object({ id: Id, revision: z.string(), supersededAt: Moment.nullable(), createdAt: Moment, lots: z.int() })),
+  revisions: z.array(
+    z.object({
+      id: Id,
+      revision: z.string(),
+      supersededAt: Moment.nullable(),
+      createdAt: Moment,
+      lots: z.int(),
+    }),
+  ),
   /** Newest first, at most 50; the list of lots has all. */
-  lots: z.array(z.object({ id: Id, number: z.string(), heat: z.string(), madeOn: Moment, made: z.int(), places: z.array(PiecesAt) })),
+  lots: z.array(
+    z.object({
+      id: Id,
+      number: z.string(),
+      heat: z.string(),
+      madeOn: Moment,
+      made: z.int(),
+      places: z.array(PiecesAt),
+    }),
+  ),
   lotCount: z.int(),
-  neededFor: z.array(z.object({ assemblyId: Id, assembly: z.string(), neededOn: z.string().nullable(), pieces: z.int() })),
+  neededFor: z.array(
+    z.object({ assemblyId: Id, assembly: z.string(), neededOn: z.string().nullable(), pieces: z.int() }),
+  ),
 });
 export type Part = z.output<typeof Part>;
 

@@ -17,14 +17,25 @@ import { stepWords } from './step-words';
 export async function createPart(ctx: Ctx, input: PartInput) {
   authorize(ctx, 'part.edit');
   await checkPart(ctx, input);
-  const [current] = await ctx.tx.select({ id: parts.id, revision: parts.revision }).from(parts).where(and(eq(parts.number, input.number), isNull(parts.supersededAt)));
+  const [current] = await ctx.tx
+    .select({ id: parts.id, revision: parts.revision })
+    .from(parts)
+    .where(and(eq(parts.number, input.number), isNull(parts.supersededAt)));
   if (current) {
     const message = `${input.number} is here already, in rev ${current.revision}. Open it and revise it.`;
-    throw new AppError('conflict', message, { fields: [{ field: 'number', message }], extra: { partId: current.id } });
+    throw new AppError('conflict', message, {
+      fields: [{ field: 'number', message }],
+      extra: { partId: current.id },
+    });
   }
   const id = newId();
   await ctx.tx.insert(parts).values({ id, shopId: shopOf(ctx), ...partColumns(input), createdAt: ctx.now });
   await saveRoute(ctx, id, input.route);
-  await recordAudit(ctx, { action: 'part.create', entity: 'part', entityId: id, after: { ...input, route: input.route.map(stepWords) } });
+  await recordAudit(ctx, {
+    action: 'part.create',
+    entity: 'part',
+    entityId: id,
+    after: { ...input, route: input.route.map(stepWords) },
+  });
   return { id, version: 1 };
 }

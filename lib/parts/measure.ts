@@ -26,7 +26,11 @@ const UNITS: Record<Quantity, readonly { words: readonly string[]; factor: numbe
   ],
 };
 
-const EXAMPLES: Record<Quantity, string> = { length: '0.040 in or 1 mm', mass: '0.41 lb or 186 g', area: '1.78 ft² or 1650 cm²' };
+const EXAMPLES: Record<Quantity, string> = {
+  length: '0.040 in or 1 mm',
+  mass: '0.41 lb or 186 g',
+  area: '1.78 ft² or 1650 cm²',
+};
 const BASE_UNITS: Record<Quantity, string> = { length: 'mm', mass: 'g', area: 'mm²' };
 
 /** The database keeps ten digits before the point and four after. */
@@ -67,7 +71,8 @@ export function inBaseUnit(value: number, quantity: Quantity): string {
 /** Numbers with a comma only between thousands: half the world writes `0,063` for what would be read as 63 here. */
 function readNumber(text: string): number | null {
   const [, whole, above, below] = /^(?:(\d+) )?(\d+)\/(\d+)$/.exec(text) ?? [];
-  if (above !== undefined) return Number(below) === 0 ? null : Number(whole ?? 0) + Number(above) / Number(below);
+  if (above !== undefined)
+    return Number(below) === 0 ? null : Number(whole ?? 0) + Number(above) / Number(below);
   if (!text.includes(',')) return Number(text);
   return /^[1-9]\d{0,2}(,\d{3})+(\.\d*)?$/.test(text) ? Number(text.replaceAll(',', '')) : null;
 }

@@ -25,7 +25,20 @@ export function partColumns(input: PartInput): Columns {
     serialised: input.serialised,
     note: orNull(input.note),
     drawingFileId: input.drawingFileId,
-    ...{ thicknessMm, thicknessEntered, lengthMm, lengthEntered, widthMm, widthEntered, heightMm, heightEntered, massG, massEntered, areaMm2, areaEntered },
+    ...{
+      thicknessMm,
+      thicknessEntered,
+      lengthMm,
+      lengthEntered,
+      widthMm,
+      widthEntered,
+      heightMm,
+      heightEntered,
+      massG,
+      massEntered,
+      areaMm2,
+      areaEntered,
+    },
   };
 }
 

@@ -20,12 +20,26 @@ const LOTS_SHOWN = 50;
 // Outer tables are named in words inside subqueries; see lib/lots/where-pieces-are.ts.
 
 /** By drawing number; a page begins after the part that ended the one before. */
-export async function listParts(ctx: Ctx, { after, limit, text, superseded }: z.output<(typeof listDeclaration)['input']>) {
+export async function listParts(
+  ctx: Ctx,
+  { after, limit, text, superseded }: z.output<(typeof listDeclaration)['input']>,
+) {
   authorize(ctx, 'part.read');
   const conditions: SQL[] = [
     ...(superseded === '0' ? [sql`${parts.supersededAt} is null`] : []),
-    ...(text ? [sql`(${sql.join(patternsOf(text).map((pattern) => sql`${parts.number} like ${pattern}`), sql` or `)} or ${parts.name} ilike ${contains(text)} or ${parts.alloy} ilike ${contains(text)})`] : []),
-    ...(after === undefined ? [] : [sql`(${parts.number}, ${parts.id}) > (select p.number, p.id from parts p where p.id::text = ${after})`]),
+    ...(text
+      ? [
+          sql`(${sql.join(
+            patternsOf(text).map((pattern) => sql`${parts.number} like ${pattern}`),
+            sql` or `,
+          )} or ${parts.name} ilike ${contains(text)} or ${parts.alloy} ilike ${contains(text)})`,
+        ]
+      : []),
+    ...(after === undefined
+      ? []
+      : [
+          sql`(${parts.number}, ${parts.id}) > (select p.number, p.id from parts p where p.id::text = ${after})`,
+        ]),
   ];
   const rows = await ctx.tx
     .select({
@@ -41,9 +55,13 @@ export async function listParts(ctx: Ctx, { after, limit, text, superseded }: z.
       endCondition: parts.endCondition,
       serialised: parts.serialised,
       supersededAt: parts.supersededAt,
-      processes: sql<Process[]>`(select coalesce(json_agg(s.process order by s.seq), '[]') from route_steps s where s.part_id = parts.id)`,
+      processes: sql<
+        Process[]
+      >`(select coalesce(json_agg(s.process order by s.seq), '[]') from route_steps s where s.part_id = parts.id)`,
       lots: sql<number>`(select count(*)::int from lots l where l.part_id = parts.id)`,
-      places: sql<PiecesAt[]>`(select coalesce(json_agg(json_build_object('place', x.place, 'pieces', x.pieces) order by x.place), '[]')
+      places: sql<
+        PiecesAt[]
+      >`(select coalesce(json_agg(json_build_object('place', x.place, 'pieces', x.pieces) order by x.place), '[]')
         from (select b.place, sum(b.pieces)::int as pieces from lots l join balances b on b.lot_id = l.id where l.part_id = parts.id and b.pieces > 0 group by b.place) x)`,
     })
     .from(parts)
@@ -55,10 +73,15 @@ export async function listParts(ctx: Ctx, { after, limit, text, superseded }: z.
 
 export async function getPart(ctx: Ctx, { partId }: { partId: string }) {
   authorize(ctx, 'part.read');
-  const [row] = await ctx.tx.select({ part: parts, drawing: fileRefColumns }).from(parts).leftJoin(files, eq(files.id, parts.drawingFileId)).where(eq(parts.id, partId));
+  const [row] = await ctx.tx
+    .select({ part: parts, drawing: fileRefColumns })
+    .from(parts)
+    .leftJoin(files, eq(files.id, parts.drawingFileId))
+    .where(eq(parts.id, partId));
   if (!row) throw notFound('part');
   const { part, drawing } = row;
-  const measured = (value: number | null, entered: string | null) => (value === null || entered === null ? null : { value, entered });
+  const measured = (value: number | null, entered: string | null) =>
+    value === null || entered === null ? null : { value, entered };
   return {
     ...part,
     thickness: measured(part.thicknessMm, part.thicknessEntered),
@@ -98,14 +121,28 @@ const routeOf = (ctx: Ctx, partId: string) =>
 
 const revisionsOf = (ctx: Ctx, number: string) =>
   ctx.tx
-    .select({ id: parts.id, revision: parts.revision, supersededAt: parts.supersededAt, createdAt: parts.createdAt, lots: sql<number>`(select count(*)::int from lots l where l.part_id = parts.id)` })
+    .select({
+      id: parts.id,
+      revision: parts.revision,
+      supersededAt: parts.supersededAt,
+      createdAt: parts.createdAt,
+      lots: sql<number>`(select count(*)::int from lots l where l.part_id = parts.id)`,
+    })
     .from(parts)
     .where(eq(parts.number, number))
     .orderBy(desc(parts.createdAt), desc(parts.id));
 
 async function lotsOf(ctx: Ctx, partId: string) {
   const rows = await ctx.tx
-    .select({ id: lots.id, number: lots.number, heat: lots.heat, madeOn: lots.madeOn, made: madeOfLot, places: placesOfLot, lotCount: sql<number>`(count(*) over ())::int` })
+    .select({
+      id: lots.id,
+      number: lots.number,
+      heat: lots.heat,
+      madeOn: lots.madeOn,
+      made: madeOfLot,
+      places: placesOfLot,
+      lotCount: sql<number>`(count(*) over ())::int`,
+    })
     .from(lots)
     .where(eq(lots.partId, partId))
     .orderBy(desc(lots.id))
@@ -115,7 +152,12 @@ async function lotsOf(ctx: Ctx, partId: string) {
 
 const neededFor = (ctx: Ctx, number: string) =>
   ctx.tx
-    .select({ assemblyId: assemblies.id, assembly: assemblies.name, neededOn: assemblies.neededOn, pieces: assemblyNeeds.pieces })
+    .select({
+      assemblyId: assemblies.id,
+      assembly: assemblies.name,
+      neededOn: assemblies.neededOn,
+      pieces: assemblyNeeds.pieces,
+    })
     .from(assemblyNeeds)
     .innerJoin(assemblies, eq(assemblies.id, assemblyNeeds.assemblyId))
     .where(sql`${assemblyNeeds.partNumber} = ${number} and ${assemblies.closedAt} is null`)

@@ -14,23 +14,43 @@ import { PROCESS_WORDS } from '@/lib/trade/process';
  * and lines of batches name them; one that was ever waited for cannot be taken out.
  */
 export async function saveRoute(ctx: Ctx, partId: string, wanted: readonly StepInput[]): Promise<void> {
-  const present = await ctx.tx.select({ id: routeSteps.id, seq: routeSteps.seq, process: routeSteps.process }).from(routeSteps).where(eq(routeSteps.partId, partId)).orderBy(routeSteps.seq);
-  refuseUnknown(wanted, present.map(({ id }) => id));
+  const present = await ctx.tx
+    .select({ id: routeSteps.id, seq: routeSteps.seq, process: routeSteps.process })
+    .from(routeSteps)
+    .where(eq(routeSteps.partId, partId))
+    .orderBy(routeSteps.seq);
+  refuseUnknown(
+    wanted,
+    present.map(({ id }) => id),
+  );
 
   const gone = present.filter(({ id }) => wanted.every((step) => step.id !== id));
-  const used = await usedSteps(ctx, gone.map(({ id }) => id));
+  const used = await usedSteps(
+    ctx,
+    gone.map(({ id }) => id),
+  );
   const kept = gone.find(({ id }) => used.has(id));
   if (kept) {
     const message = `Step ${kept.seq}, ${PROCESS_WORDS[kept.process]}, stays: lots have waited for it. Revise the part to leave it out.`;
     throw new AppError('conflict', message, { fields: [{ field: 'route', message }] });
   }
-  if (gone.length > 0) await ctx.tx.delete(routeSteps).where(inArray(routeSteps.id, gone.map(({ id }) => id)));
+  if (gone.length > 0)
+    await ctx.tx.delete(routeSteps).where(
+      inArray(
+        routeSteps.id,
+        gone.map(({ id }) => id),
+      ),
+    );
 
   // Out of the way first, since two steps may not have one place even for a moment.
-  await ctx.tx.update(routeSteps).set({ seq: sql`-${routeSteps.seq}` }).where(eq(routeSteps.partId, partId));
+  await ctx.tx
+    .update(routeSteps)
+    .set({ seq: sql`-${routeSteps.seq}` })
+    .where(eq(routeSteps.partId, partId));
   for (const [at, step] of wanted.entries()) {
     const columns = stepColumns(step, at + 1);
-    if (step.id === undefined) await ctx.tx.insert(routeSteps).values({ id: newId(), shopId: shopOf(ctx), partId, ...columns });
+    if (step.id === undefined)
+      await ctx.tx.insert(routeSteps).values({ id: newId(), shopId: shopOf(ctx), partId, ...columns });
     else await ctx.tx.update(routeSteps).set(columns).where(eq(routeSteps.id, step.id));
   }
 }
@@ -38,7 +58,10 @@ export async function saveRoute(ctx: Ctx, partId: string, wanted: readonly StepI
 function refuseUnknown(wanted: readonly StepInput[], present: readonly string[]): void {
   const named = wanted.flatMap(({ id }) => id ?? []);
   if (named.some((id) => !present.includes(id)) || new Set(named).size < named.length) {
-    throw new AppError('conflict', 'The route was changed meanwhile. Look at what it is now, then save again.');
+    throw new AppError(
+      'conflict',
+      'The route was changed meanwhile. Look at what it is now, then save again.',
+    );
   }
 }
 

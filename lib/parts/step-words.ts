@@ -14,9 +14,22 @@ interface Step {
 
 /** A step in one line with all that can change of it, for the history. */
 export function stepWords(step: Step, at: number): string {
-  const { specification, specificationRevision, classType, conditionBefore, targetCondition, note, toProve } = step;
+  const { specification, specificationRevision, classType, conditionBefore, targetCondition, note, toProve } =
+    step;
   const conditions = [conditionBefore, targetCondition].filter(Boolean).join(' to ');
-  const proofs = toProve.map(({ characteristic, limit, unit, source, sourceText }) => [characteristic, limit, unit, `(${[source, sourceText].filter(Boolean).join(' ')})`].filter(Boolean).join(' '));
-  const parts = [`${at + 1} ${PROCESS_WORDS[step.process]}`, specification, specificationRevision, classType, conditions, note, proofs.length > 0 ? `proves ${proofs.join('; ')}` : ''];
+  const proofs = toProve.map(({ characteristic, limit, unit, source, sourceText }) =>
+    [characteristic, limit, unit, `(${[source, sourceText].filter(Boolean).join(' ')})`]
+      .filter(Boolean)
+      .join(' '),
+  );
+  const parts = [
+    `${at + 1} ${PROCESS_WORDS[step.process]}`,
+    specification,
+    specificationRevision,
+    classType,
+    conditions,
+    note,
+    proofs.length > 0 ? `proves ${proofs.join('; ')}` : '',
+  ];
   return parts.filter(Boolean).join(' ');
 }

@@ -41,7 +41,20 @@ export const linkPayingMethod = declare({
   response: PageLink,
 });
 
-export const PAYOUT_COUNTRIES = ['US', 'CA', 'GB', 'DE', 'FR', 'NL', 'SE', 'NO', 'DK', 'CH', 'AU', 'NZ'] as const;
+export const PAYOUT_COUNTRIES = [
+  'US',
+  'CA',
+  'GB',
+  'DE',
+  'FR',
+  'NL',
+  'SE',
+  'NO',
+  'DK',
+  'CH',
+  'AU',
+  'NZ',
+] as const;
 
 export const getPayoutAccount = declare({
   id: 'getPayoutAccount',

@@ -14,7 +14,13 @@ export type PaymentNotice = { eventId: string; type: string; occurredAt: Date } 
       reason: string | null;
       metadata: Record<string, string>;
     }
-  | { about: 'refund'; intentId: string | null; refundedMinor: number; currency: string; metadata: Record<string, string> }
+  | {
+      about: 'refund';
+      intentId: string | null;
+      refundedMinor: number;
+      currency: string;
+      metadata: Record<string, string>;
+    }
   | { about: 'account'; accountId: string; canReceive: boolean }
   | { about: 'payment_method'; customer: string; paymentMethod: string }
   | { about: 'nothing' }
@@ -32,10 +38,19 @@ export function parseWebhook(
 
 /** What an event tells us, of one whose signature was checked when it came. */
 export function noticeOf(event: Stripe.Event): PaymentNotice {
-  return { eventId: event.id, type: event.type, occurredAt: new Date(event.created * 1000), ...contentOf(event) };
+  return {
+    eventId: event.id,
+    type: event.type,
+    occurredAt: new Date(event.created * 1000),
+    ...contentOf(event),
+  };
 }
 
-function verified(rawBody: string, signature: string, { secret, stripe }: { secret: string; stripe: Stripe }): Stripe.Event {
+function verified(
+  rawBody: string,
+  signature: string,
+  { secret, stripe }: { secret: string; stripe: Stripe },
+): Stripe.Event {
   try {
     return stripe.webhooks.constructEvent(rawBody, signature, secret);
   } catch {
@@ -43,7 +58,11 @@ function verified(rawBody: string, signature: string, { secret, stripe }: { secr
   }
 }
 
-type Content = PaymentNotice extends infer Notice ? (Notice extends unknown ? Omit<Notice, 'eventId' | 'type' | 'occurredAt'> : never) : never;
+type Content = PaymentNotice extends infer Notice
+  ? Notice extends unknown
+    ? Omit<Notice, 'eventId' | 'type' | 'occurredAt'>
+    : never
+  : never;
 
 function contentOf(event: Stripe.Event): Content {
   switch (event.type) {
@@ -66,7 +85,10 @@ function contentOf(event: Stripe.Event): Content {
   }
 }
 
-function paymentOf(intent: Stripe.PaymentIntent, state: 'succeeded' | 'processing' | 'failed' | 'cancelled'): Content {
+function paymentOf(
+  intent: Stripe.PaymentIntent,
+  state: 'succeeded' | 'processing' | 'failed' | 'cancelled',
+): Content {
   return {
     about: 'payment',
     intentId: intent.id,
@@ -96,7 +118,9 @@ function accountOf(account: Stripe.Account): Content {
 function methodOf(intent: Stripe.SetupIntent): Content {
   const customer = idOf(intent.customer);
   const paymentMethod = idOf(intent.payment_method);
-  return customer === null || paymentMethod === null ? { about: 'nothing' } : { about: 'payment_method', customer, paymentMethod };
+  return customer === null || paymentMethod === null
+    ? { about: 'nothing' }
+    : { about: 'payment_method', customer, paymentMethod };
 }
 
 function idOf(linked: string | { id: string } | null | undefined): string | null {

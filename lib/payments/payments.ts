@@ -16,7 +16,10 @@ export interface NewConnectedAccount {
 }
 
 /** An account that can receive money once its owner has gone through the onboarding link. */
-export async function createConnectedAccount(processor: NewConnectedAccount, stripe: Stripe = ownStripe()): Promise<string> {
+export async function createConnectedAccount(
+  processor: NewConnectedAccount,
+  stripe: Stripe = ownStripe(),
+): Promise<string> {
   const { name, email, country, processorId } = processor;
   const account = await reaching(() =>
     stripe.accounts.create(
@@ -41,15 +44,26 @@ export async function createOnboardingLink(
 ): Promise<string> {
   const { account, returnUrl, refreshUrl } = link;
   const made = await reaching(() =>
-    stripe.accountLinks.create({ account, type: 'account_onboarding', return_url: returnUrl, refresh_url: refreshUrl }),
+    stripe.accountLinks.create({
+      account,
+      type: 'account_onboarding',
+      return_url: returnUrl,
+      refresh_url: refreshUrl,
+    }),
   );
   return made.url;
 }
 
-export async function createCustomer(shop: { name: string; email: string; shopId: string }, stripe: Stripe = ownStripe()): Promise<string> {
+export async function createCustomer(
+  shop: { name: string; email: string; shopId: string },
+  stripe: Stripe = ownStripe(),
+): Promise<string> {
   const { name, email, shopId } = shop;
   const customer = await reaching(() =>
-    stripe.customers.create({ name, email, metadata: { shop_id: shopId } }, { idempotencyKey: `customer:${shopId}` }),
+    stripe.customers.create(
+      { name, email, metadata: { shop_id: shopId } },
+      { idempotencyKey: `customer:${shopId}` },
+    ),
   );
   return customer.id;
 }
@@ -61,9 +75,16 @@ export async function createPaymentMethodLink(
 ): Promise<string> {
   const { customer, successUrl, cancelUrl } = link;
   const session = await reaching(() =>
-    stripe.checkout.sessions.create({ mode: 'setup', customer, currency: 'usd', success_url: successUrl, cancel_url: cancelUrl }),
+    stripe.checkout.sessions.create({
+      mode: 'setup',
+      customer,
+      currency: 'usd',
+      success_url: successUrl,
+      cancel_url: cancelUrl,
+    }),
   );
-  if (session.url === null) throw new AppError('unavailable', 'The payment service gave no page to save a method on. Try again.');
+  if (session.url === null)
+    throw new AppError('unavailable', 'The payment service gave no page to save a method on. Try again.');
   return session.url;
 }
 
@@ -72,7 +93,9 @@ export async function savePaymentMethod(
   saved: { customer: string; paymentMethod: string },
   stripe: Stripe = ownStripe(),
 ): Promise<string> {
-  const method = await reaching(() => stripe.paymentMethods.attach(saved.paymentMethod, { customer: saved.customer }));
+  const method = await reaching(() =>
+    stripe.paymentMethods.attach(saved.paymentMethod, { customer: saved.customer }),
+  );
   return method.id;
 }
 
@@ -93,8 +116,20 @@ export interface InvoicePayment {
 }
 
 /** Pays a processor from the shop's saved method. What is returned is provisional; the truth comes by webhook. */
-export function payInvoiceIntent(payment: InvoicePayment, stripe: Stripe = ownStripe()): Promise<PaymentAttempt> {
-  const { amountMinor, currency, customer, paymentMethod, destinationAccount, idempotencyKey, description, metadata } = payment;
+export function payInvoiceIntent(
+  payment: InvoicePayment,
+  stripe: Stripe = ownStripe(),
+): Promise<PaymentAttempt> {
+  const {
+    amountMinor,
+    currency,
+    customer,
+    paymentMethod,
+    destinationAccount,
+    idempotencyKey,
+    description,
+    metadata,
+  } = payment;
   return attempt(() =>
     stripe.paymentIntents.create(
       {
@@ -147,12 +182,19 @@ export function retryInvoiceIntent(
 ): Promise<PaymentAttempt> {
   const { intentId, paymentMethod, idempotencyKey } = retry;
   return attempt(() =>
-    stripe.paymentIntents.confirm(intentId, { payment_method: paymentMethod, off_session: true }, { idempotencyKey }),
+    stripe.paymentIntents.confirm(
+      intentId,
+      { payment_method: paymentMethod, off_session: true },
+      { idempotencyKey },
+    ),
   );
 }
 
 /** The intent as it stands now, with its last charge: webhooks come out of order, or not at all. */
-export async function getPaymentIntent(intentId: string, stripe: Stripe = ownStripe()): Promise<Stripe.PaymentIntent> {
+export async function getPaymentIntent(
+  intentId: string,
+  stripe: Stripe = ownStripe(),
+): Promise<Stripe.PaymentIntent> {
   return reaching(() => stripe.paymentIntents.retrieve(intentId, { expand: ['latest_charge'] }));
 }
 
@@ -163,7 +205,10 @@ export async function refundPayment(
 ): Promise<string> {
   const { intentId, amountMinor, idempotencyKey, metadata } = refund;
   const made = await reaching(() =>
-    stripe.refunds.create({ payment_intent: intentId, amount: amountMinor, reverse_transfer: true, metadata }, { idempotencyKey }),
+    stripe.refunds.create(
+      { payment_intent: intentId, amount: amountMinor, reverse_transfer: true, metadata },
+      { idempotencyKey },
+    ),
   );
   return made.id;
 }
@@ -173,7 +218,11 @@ async function attempt(work: () => Promise<Stripe.PaymentIntent>): Promise<Payme
     const intent = await reaching(work);
     if (intent.status === 'succeeded') return { state: 'succeeded', intentId: intent.id };
     if (intent.status === 'processing') return { state: 'processing', intentId: intent.id };
-    return { state: 'declined', intentId: intent.id, reason: intent.last_payment_error?.message ?? 'The payment was not completed.' };
+    return {
+      state: 'declined',
+      intentId: intent.id,
+      reason: intent.last_payment_error?.message ?? 'The payment was not completed.',
+    };
   } catch (error) {
     if (!(error instanceof Stripe.errors.StripeCardError) || error.payment_intent === undefined) throw error;
     return { state: 'declined', intentId: error.payment_intent.id, reason: error.message };
@@ -185,10 +234,15 @@ async function reaching<T>(work: () => Promise<T>): Promise<T> {
   try {
     return await work();
   } catch (error) {
-    const isAway = error instanceof Stripe.errors.StripeConnectionError || error instanceof Stripe.errors.StripeAPIError;
+    const isAway =
+      error instanceof Stripe.errors.StripeConnectionError || error instanceof Stripe.errors.StripeAPIError;
     if (!isAway) throw error;
-    throw new AppError('unavailable', 'The payment service does not answer just now. Nothing has been paid twice; it will be tried again.', {
-      extra: { reason: error.name },
-    });
+    throw new AppError(
+      'unavailable',
+      'The payment service does not answer just now. Nothing has been paid twice; it will be tried again.',
+      {
+        extra: { reason: error.name },
+      },
+    );
   }
 }

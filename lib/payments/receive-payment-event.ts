@@ -14,16 +14,26 @@ import { workPaymentEventQueue } from './work-payment-event-queue';
  *
  * @throws AppError `bad_input` for a signature that is not the service's.
  */
-export async function receivePaymentEvent(ctx: Ctx, { body, signature }: { body: string; signature: string | null }) {
+export async function receivePaymentEvent(
+  ctx: Ctx,
+  { body, signature }: { body: string; signature: string | null },
+) {
   authorize(ctx, 'public.use');
   const notice = parseWebhook(body, signature);
   const isNews = notice.about !== 'nothing';
   const [first] = await ctx.tx
     .insert(paymentEvents)
-    .values({ id: notice.eventId, type: notice.type, payload: JSON.parse(body) as unknown, receivedAt: ctx.now, workedAt: isNews ? null : ctx.now })
+    .values({
+      id: notice.eventId,
+      type: notice.type,
+      payload: JSON.parse(body) as unknown,
+      receivedAt: ctx.now,
+      workedAt: isNews ? null : ctx.now,
+    })
     .onConflictDoNothing()
     .returning({ id: paymentEvents.id });
-  if (first && isNews) await enqueue(ctx, workPaymentEventQueue, { shopId: await shopOf(ctx, notice), eventId: notice.eventId });
+  if (first && isNews)
+    await enqueue(ctx, workPaymentEventQueue, { shopId: await shopOf(ctx, notice), eventId: notice.eventId });
   return { done: true as const };
 }
 
@@ -31,6 +41,9 @@ export async function receivePaymentEvent(ctx: Ctx, { body, signature }: { body:
 async function shopOf(ctx: Ctx, notice: PaymentNotice): Promise<string | null> {
   if (notice.about !== 'payment' && notice.about !== 'refund') return null;
   if (notice.intentId === null) return null;
-  const [known] = await ctx.tx.select({ shopId: payments.shopId }).from(payments).where(eq(payments.intentId, notice.intentId));
+  const [known] = await ctx.tx
+    .select({ shopId: payments.shopId })
+    .from(payments)
+    .where(eq(payments.intentId, notice.intentId));
   return known?.shopId ?? null;
 }

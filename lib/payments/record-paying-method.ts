@@ -20,6 +20,12 @@ export async function recordPayingMethod(tools: JobTools, customer: string): Pro
       .for('update');
     if (!shop || shop.before === paymentMethod) return;
     await ctx.tx.update(shops).set({ stripePaymentMethodId: paymentMethod }).where(eq(shops.id, shopId));
-    await recordAudit(ctx, { action: 'shop.save_paying_method', entity: 'shop', entityId: shopId, before: { paymentMethod: shop.before }, after: { paymentMethod } });
+    await recordAudit(ctx, {
+      action: 'shop.save_paying_method',
+      entity: 'shop',
+      entityId: shopId,
+      before: { paymentMethod: shop.before },
+      after: { paymentMethod },
+    });
   });
 }

@@ -18,9 +18,24 @@ export async function recordPayoutAccount(tools: JobTools, account: string): Pro
     if (!processor || processor.before === payoutsReady) return;
     await ctx.tx.update(processors).set({ payoutsReady }).where(eq(processors.id, processor.id));
     // One order for everybody: each entry locks its shop's chain until the end.
-    const shops = await ctx.tx.select({ shopId: shopProcessors.shopId }).from(shopProcessors).where(eq(shopProcessors.processorId, processor.id)).orderBy(asc(shopProcessors.shopId));
+    const shops = await ctx.tx
+      .select({ shopId: shopProcessors.shopId })
+      .from(shopProcessors)
+      .where(eq(shopProcessors.processorId, processor.id))
+      .orderBy(asc(shopProcessors.shopId));
     for (const { shopId } of shops) {
-      await recordInShop(ctx, shopId, { action: 'processor.payouts', entity: 'processor', entityId: processor.id, before: { canBePaid: !payoutsReady }, after: { canBePaid: payoutsReady } }, ctx.actor);
+      await recordInShop(
+        ctx,
+        shopId,
+        {
+          action: 'processor.payouts',
+          entity: 'processor',
+          entityId: processor.id,
+          before: { canBePaid: !payoutsReady },
+          after: { canBePaid: payoutsReady },
+        },
+        ctx.actor,
+      );
     }
   });
 }

@@ -28,5 +28,9 @@ export function ownStripe(): Stripe {
 function addressOf(apiBase: string): { protocol: 'http' | 'https'; host: string; port: number } {
   const { protocol, hostname, port } = new URL(apiBase);
   const isSecure = protocol === 'https:';
-  return { protocol: isSecure ? 'https' : 'http', host: hostname, port: Number(port || (isSecure ? 443 : 80)) };
+  return {
+    protocol: isSecure ? 'https' : 'http',
+    host: hostname,
+    port: Number(port || (isSecure ? 443 : 80)),
+  };
 }

@@ -27,7 +27,9 @@ export async function workPaymentEvent(tools: JobTools, payload: Payload): Promi
   const event = await tools.atDoor((ctx) => readUnworked(ctx, payload.eventId));
   if (!event) return;
   await workNotice(tools, noticeOf(event));
-  await tools.atDoor((ctx) => ctx.tx.update(paymentEvents).set({ workedAt: ctx.now }).where(eq(paymentEvents.id, payload.eventId)));
+  await tools.atDoor((ctx) =>
+    ctx.tx.update(paymentEvents).set({ workedAt: ctx.now }).where(eq(paymentEvents.id, payload.eventId)),
+  );
 }
 
 async function readUnworked(ctx: Ctx, eventId: string): Promise<Stripe.Event | null> {
@@ -52,7 +54,11 @@ async function workNotice(tools: JobTools, notice: PaymentNotice): Promise<void>
   }
 }
 
-async function workIntent(tools: JobTools, intentId: string, metadata: Record<string, string>): Promise<void> {
+async function workIntent(
+  tools: JobTools,
+  intentId: string,
+  metadata: Record<string, string>,
+): Promise<void> {
   // Whose it is, is read before the intent is: see `recordIntent`.
   const payment = await tools.atDoor((ctx) => findPayment(ctx, intentId, metadata['payment_id']));
   if (!payment) return;
@@ -65,7 +71,10 @@ async function findPayment(ctx: Ctx, intentId: string, paymentId: string | undef
   const columns = { id: payments.id, shopId: payments.shopId };
   const [byIntent] = await ctx.tx.select(columns).from(payments).where(eq(payments.intentId, intentId));
   if (byIntent || !z.uuid().safeParse(paymentId).success) return byIntent ?? null;
-  const [byId] = await ctx.tx.select(columns).from(payments).where(eq(payments.id, paymentId ?? ''));
+  const [byId] = await ctx.tx
+    .select(columns)
+    .from(payments)
+    .where(eq(payments.id, paymentId ?? ''));
   return byId ?? null;
 }
 
@@ -78,11 +87,20 @@ async function look(tools: JobTools, payload: Extract<Payload, { paymentId: stri
   await tools.inShop(shopId, async (ctx) => {
     await recordIntent(ctx, paymentId, newsOf(intent));
     const after = await readPayment(ctx, paymentId);
-    if (after?.state === 'pending') await enqueue(ctx, workPaymentEventQueue, { ...payload, look: payload.look + 1 }, { startAfter: lookAgainAt(ctx.now, payload.look) });
+    if (after?.state === 'pending')
+      await enqueue(
+        ctx,
+        workPaymentEventQueue,
+        { ...payload, look: payload.look + 1 },
+        { startAfter: lookAgainAt(ctx.now, payload.look) },
+      );
   });
 }
 
 async function readPayment(ctx: Ctx, paymentId: string) {
-  const [payment] = await ctx.tx.select({ state: payments.state, intentId: payments.intentId }).from(payments).where(eq(payments.id, paymentId));
+  const [payment] = await ctx.tx
+    .select({ state: payments.state, intentId: payments.intentId })
+    .from(payments)
+    .where(eq(payments.id, paymentId));
   return payment;
 }

@@ -23,7 +23,11 @@ export function registerFonts(): void {
   for (const { family, file } of FACES) {
     for (const fontWeight of [400, 600] as const) {
       Font.register({ family, fontWeight, src: join(FOLDER, `${file}-latin-${fontWeight}.woff`) });
-      Font.register({ family: `${family} Ext`, fontWeight, src: join(FOLDER, `${file}-latin-ext-${fontWeight}.woff`) });
+      Font.register({
+        family: `${family} Ext`,
+        fontWeight,
+        src: join(FOLDER, `${file}-latin-ext-${fontWeight}.woff`),
+      });
     }
   }
   // Numbers and names are never broken in the middle.

@@ -4,10 +4,17 @@ import { declare } from '@/lib/api/endpoint';
 import { Done, Id } from '@/lib/api/shapes';
 
 /** Long beats odd: length is what makes a password hard to guess. */
-export const NewPassword = z.string().min(12, 'Use 12 characters or more.').max(200, 'Use 200 characters or less.');
+export const NewPassword = z
+  .string()
+  .min(12, 'Use 12 characters or more.')
+  .max(200, 'Use 200 characters or less.');
 
 export const PersonName = z.string().trim().min(1, 'Enter a name.').max(120, 'Use 120 characters or less.');
-export const Email = z.string().trim().toLowerCase().pipe(z.email('Enter an e-mail address, as name@shop.example.').max(254));
+export const Email = z
+  .string()
+  .trim()
+  .toLowerCase()
+  .pipe(z.email('Enter an e-mail address, as name@shop.example.').max(254));
 const Token = z.string().min(20).max(200);
 
 export const Account = z.object({
@@ -16,7 +23,15 @@ export const Account = z.object({
   units: z.enum(['inch', 'metric']),
   singleKeys: z.boolean(),
   hasPassword: z.boolean(),
-  organisations: z.array(z.object({ membershipId: Id, id: Id, kind: z.enum(['shop', 'processor']), name: z.string(), roles: z.array(z.string()) })),
+  organisations: z.array(
+    z.object({
+      membershipId: Id,
+      id: Id,
+      kind: z.enum(['shop', 'processor']),
+      name: z.string(),
+      roles: z.array(z.string()),
+    }),
+  ),
 });
 export type Account = z.output<typeof Account>;
 
@@ -43,7 +58,11 @@ export const updateAccount = declare({
   summary: 'Change my name, units and single keys',
   side: 'public',
   permission: 'self.manage',
-  input: z.object({ name: PersonName.optional(), units: z.enum(['inch', 'metric']).optional(), singleKeys: z.boolean().optional() }),
+  input: z.object({
+    name: PersonName.optional(),
+    units: z.enum(['inch', 'metric']).optional(),
+    singleKeys: z.boolean().optional(),
+  }),
   response: Done,
 });
 
@@ -86,7 +105,8 @@ export const requestReset = declare({
   id: 'requestReset',
   method: 'post',
   path: '/session/resets',
-  summary: 'Mail a link to choose another password; the answer is the same whether there is such an account or not',
+  summary:
+    'Mail a link to choose another password; the answer is the same whether there is such an account or not',
   side: 'public',
   permission: 'public.use',
   input: Mailed.pick({ email: true }),
@@ -101,7 +121,12 @@ export const readMailedLink = declare({
   side: 'public',
   permission: 'public.use',
   input: z.object({ token: Token }),
-  response: z.object({ state: z.enum(['open', 'used', 'expired', 'unknown']), purpose: z.enum(['sign_in', 'reset']).nullable(), name: z.string().nullable(), email: z.string().nullable() }),
+  response: z.object({
+    state: z.enum(['open', 'used', 'expired', 'unknown']),
+    purpose: z.enum(['sign_in', 'reset']).nullable(),
+    name: z.string().nullable(),
+    email: z.string().nullable(),
+  }),
 });
 
 export const resetPassword = declare({
@@ -138,7 +163,8 @@ export const acceptInvitation = declare({
   id: 'acceptInvitation',
   method: 'post',
   path: '/session/invitations/{token}',
-  summary: 'Accept an invitation, once: set a name and a password, or add the organisation to the account there is',
+  summary:
+    'Accept an invitation, once: set a name and a password, or add the organisation to the account there is',
   side: 'public',
   permission: 'public.use',
   input: z.object({ token: Token, name: PersonName.optional(), password: NewPassword.optional() }),

@@ -32,10 +32,15 @@ export async function changePassword(ctx: Ctx, { password }: z.output<(typeof de
 }
 
 /** Before the transaction, so that a wrong try counts although everything else is rolled back. */
-export async function proveCurrentPassword(outside: Outside, { current }: { current: string }): Promise<void> {
+export async function proveCurrentPassword(
+  outside: Outside,
+  { current }: { current: string },
+): Promise<void> {
   await tryPasswordAgain(outside, { password: current }).catch((error: unknown) => {
     if (!(error instanceof AppError) || error.code !== 'bad_input') throw error;
-    throw new AppError('bad_input', 'The password you have now is another one.', { fields: [{ field: 'current', message: 'This is not the password you have now. Type it again.' }] });
+    throw new AppError('bad_input', 'The password you have now is another one.', {
+      fields: [{ field: 'current', message: 'This is not the password you have now. Type it again.' }],
+    });
   });
 }
 
@@ -44,5 +49,12 @@ export function refuseGuessable(password: string, email: string): void {
   const plain = password.toLowerCase();
   const isGuessable = plain === email.toLowerCase() || new Set(plain).size < 5;
   if (!isGuessable) return;
-  throw new AppError('bad_input', 'This password is too easy to guess.', { fields: [{ field: 'password', message: 'This is too easy to guess. Choose a few words that nobody would put together.' }] });
+  throw new AppError('bad_input', 'This password is too easy to guess.', {
+    fields: [
+      {
+        field: 'password',
+        message: 'This is too easy to guess. Choose a few words that nobody would put together.',
+      },
+    ],
+  });
 }

@@ -15,12 +15,18 @@ import type { createToken as declaration } from './token-contract';
 const HINT_LENGTH = 9;
 
 /** At most what its owner may do today; when the owner loses a role, the token loses it with the next request. */
-export async function createToken(ctx: Ctx, { name, scopes, lastDay }: z.output<(typeof declaration)['input']>) {
+export async function createToken(
+  ctx: Ctx,
+  { name, scopes, lastDay }: z.output<(typeof declaration)['input']>,
+) {
   authorize(ctx, 'token.manage');
   const userId = personOf(ctx.actor);
   if (userId === null) throw new AppError('not_allowed', 'Only a person may have tokens.');
   const beyond = scopes.filter((scope) => !isAllowed(ctx.actor, scope));
-  if (beyond.length > 0) throw new AppError('bad_input', 'A token may do at most what you may do.', { fields: [{ field: 'scopes', message: `You may not do this yourself: ${beyond.join(', ')}.` }] });
+  if (beyond.length > 0)
+    throw new AppError('bad_input', 'A token may do at most what you may do.', {
+      fields: [{ field: 'scopes', message: `You may not do this yourself: ${beyond.join(', ')}.` }],
+    });
 
   const token = newToken('lw_');
   const id = newId();
@@ -32,10 +38,18 @@ export async function createToken(ctx: Ctx, { name, scopes, lastDay }: z.output<
     tokenHash: hashToken(token),
     hint: token.slice(0, HINT_LENGTH),
     scopes: [...new Set(scopes)],
-    expiresAt: lastDay === null ? null : sql`((${lastDay}::date + 1)::timestamp at time zone (select zone from shops where id = ${shopOf(ctx)}))`,
+    expiresAt:
+      lastDay === null
+        ? null
+        : sql`((${lastDay}::date + 1)::timestamp at time zone (select zone from shops where id = ${shopOf(ctx)}))`,
     createdAt: ctx.now,
   });
-  await recordAudit(ctx, { action: 'token.create', entity: 'token', entityId: id, after: { name, scopes, lastDay } });
+  await recordAudit(ctx, {
+    action: 'token.create',
+    entity: 'token',
+    entityId: id,
+    after: { name, scopes, lastDay },
+  });
   // A web answer of its own: the answer to a repeat is otherwise kept in the database, and this one must not be.
   return Response.json({ id, token }, { headers: { 'cache-control': 'no-store' } });
 }

@@ -20,7 +20,10 @@ import { listTokens } from './tokens';
 
 export const getAccountEndpoint = endpoint(account.getAccount, getAccount);
 export const updateAccountEndpoint = endpoint(account.updateAccount, updateAccount);
-export const changePasswordEndpoint = endpointInSteps(account.changePassword, { outside: proveCurrentPassword, run: changePassword });
+export const changePasswordEndpoint = endpointInSteps(account.changePassword, {
+  outside: proveCurrentPassword,
+  run: changePassword,
+});
 export const endMySessionsEndpoint = endpoint(account.endMySessions, endMySessions);
 export const requestSignInLinkEndpoint = endpoint(account.requestSignInLink, requestSignInLink);
 export const requestResetEndpoint = endpoint(account.requestReset, requestReset);

@@ -9,7 +9,13 @@ import { hashToken } from '@/lib/auth/identify';
 export async function readMailedLink(ctx: Ctx, { token }: { token: string }) {
   authorize(ctx, 'public.use');
   const [link] = await ctx.tx
-    .select({ purpose: mailedLinks.purpose, usedAt: mailedLinks.usedAt, expiresAt: mailedLinks.expiresAt, name: users.name, email: users.email })
+    .select({
+      purpose: mailedLinks.purpose,
+      usedAt: mailedLinks.usedAt,
+      expiresAt: mailedLinks.expiresAt,
+      name: users.name,
+      email: users.email,
+    })
     .from(mailedLinks)
     .innerJoin(users, eq(users.id, mailedLinks.userId))
     .where(eq(mailedLinks.tokenHash, hashToken(token)));

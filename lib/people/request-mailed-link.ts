@@ -11,17 +11,27 @@ import { env } from '@/lib/env';
 import { newId } from '@/lib/ids';
 import { queueMail } from '@/lib/mail/queue-mail';
 
-import type { requestReset as resetDeclaration, requestSignInLink as signInDeclaration } from './account-contract';
+import type {
+  requestReset as resetDeclaration,
+  requestSignInLink as signInDeclaration,
+} from './account-contract';
 import { recordForPerson } from './record-for-person';
 import { safeNext } from './safe-next';
 import { takeTry } from './throttle';
 
 const VALID_MIN = { sign_in: 20, reset: 60 } as const;
 
-export async function requestSignInLink(ctx: Ctx, { email, next }: z.output<(typeof signInDeclaration)['input']>) {
+export async function requestSignInLink(
+  ctx: Ctx,
+  { email, next }: z.output<(typeof signInDeclaration)['input']>,
+) {
   authorize(ctx, 'public.use');
   const to = safeNext(next);
-  return mailLink(ctx, { email, purpose: 'sign_in', addressOf: (token) => `/sign-in-link/${token}${to === '/' ? '' : `?next=${encodeURIComponent(to)}`}` });
+  return mailLink(ctx, {
+    email,
+    purpose: 'sign_in',
+    addressOf: (token) => `/sign-in-link/${token}${to === '/' ? '' : `?next=${encodeURIComponent(to)}`}`,
+  });
 }
 
 export async function requestReset(ctx: Ctx, { email }: z.output<(typeof resetDeclaration)['input']>) {
@@ -51,12 +61,32 @@ async function mailLink(ctx: Ctx, { email, purpose, addressOf }: Asked): Promise
 
   const token = newToken();
   const expiresAt = new Date(ctx.now.getTime() + VALID_MIN[purpose] * 60_000);
-  await ctx.tx.insert(mailedLinks).values({ id: newId(), userId: user.id, purpose, tokenHash: hashToken(token), expiresAt, createdAt: ctx.now });
+  await ctx.tx
+    .insert(mailedLinks)
+    .values({
+      id: newId(),
+      userId: user.id,
+      purpose,
+      tokenHash: hashToken(token),
+      expiresAt,
+      createdAt: ctx.now,
+    });
   await queueMail(ctx, {
     template: purpose === 'reset' ? 'reset' : 'sign-in',
     to: email,
-    props: { name: user.name, url: env.APP_URL + addressOf(token), expiresAt, zone: user.shopZone ?? user.processorZone ?? 'UTC', statedAt: ctx.now },
+    props: {
+      name: user.name,
+      url: env.APP_URL + addressOf(token),
+      expiresAt,
+      zone: user.shopZone ?? user.processorZone ?? 'UTC',
+      statedAt: ctx.now,
+    },
   });
-  await recordForPerson(ctx, user, { action: purpose === 'reset' ? 'person.ask_for_reset' : 'person.ask_for_link' }, { kind: 'nobody', name: 'somebody at the sign-in page', roles: [] });
+  await recordForPerson(
+    ctx,
+    user,
+    { action: purpose === 'reset' ? 'person.ask_for_reset' : 'person.ask_for_link' },
+    { kind: 'nobody', name: 'somebody at the sign-in page', roles: [] },
+  );
   return { done: true };
 }

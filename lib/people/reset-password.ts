@@ -18,7 +18,14 @@ export async function resetPassword(ctx: Ctx, { token, password }: z.output<(typ
   const [link] = await ctx.tx
     .update(mailedLinks)
     .set({ usedAt: ctx.now })
-    .where(and(eq(mailedLinks.tokenHash, hashToken(token)), eq(mailedLinks.purpose, 'reset'), isNull(mailedLinks.usedAt), gt(mailedLinks.expiresAt, ctx.now)))
+    .where(
+      and(
+        eq(mailedLinks.tokenHash, hashToken(token)),
+        eq(mailedLinks.purpose, 'reset'),
+        isNull(mailedLinks.usedAt),
+        gt(mailedLinks.expiresAt, ctx.now),
+      ),
+    )
     .returning({ userId: mailedLinks.userId });
   if (!link) throw new AppError('gone', 'This link was used, or its time is over. Ask for another one.');
   const passwordHash = await hashPassword(password);
@@ -29,7 +36,10 @@ export async function resetPassword(ctx: Ctx, { token, password }: z.output<(typ
     .returning({ id: users.id, name: users.name, email: users.email });
   if (!user) throw new AppError('gone', 'This account is closed. Ask an admin of your shop.');
   refuseGuessable(password, user.email);
-  await ctx.tx.update(mailedLinks).set({ usedAt: ctx.now }).where(and(eq(mailedLinks.userId, user.id), isNull(mailedLinks.usedAt)));
+  await ctx.tx
+    .update(mailedLinks)
+    .set({ usedAt: ctx.now })
+    .where(and(eq(mailedLinks.userId, user.id), isNull(mailedLinks.usedAt)));
   await recordForPerson(ctx, user, { action: 'person.reset_password' });
   return { email: user.email };
 }

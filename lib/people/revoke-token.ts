@@ -8,8 +8,17 @@ import { notFound } from '@/lib/errors';
 
 export async function revokeToken(ctx: Ctx, { tokenId }: { tokenId: string }) {
   authorize(ctx, 'token.manage');
-  const [token] = await ctx.tx.update(apiTokens).set({ revokedAt: ctx.now }).where(and(eq(apiTokens.id, tokenId), isNull(apiTokens.revokedAt))).returning({ name: apiTokens.name });
+  const [token] = await ctx.tx
+    .update(apiTokens)
+    .set({ revokedAt: ctx.now })
+    .where(and(eq(apiTokens.id, tokenId), isNull(apiTokens.revokedAt)))
+    .returning({ name: apiTokens.name });
   if (!token) throw notFound('token');
-  await recordAudit(ctx, { action: 'token.revoke', entity: 'token', entityId: tokenId, before: { name: token.name } });
+  await recordAudit(ctx, {
+    action: 'token.revoke',
+    entity: 'token',
+    entityId: tokenId,
+    before: { name: token.name },
+  });
   return { done: true as const };
 }

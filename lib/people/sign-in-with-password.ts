@@ -24,7 +24,13 @@ export async function signInWithPassword(db: Db, attempt: Attempt): Promise<Sess
   await takeTry(db, 'sign_in', attempt);
   const user = await withTenant(db, { kind: 'door' }, async (tx) => {
     const [found] = await tx
-      .select({ id: users.id, passwordHash: users.passwordHash, sessionVersion: users.sessionVersion, shopId: memberships.shopId, processorId: memberships.processorId })
+      .select({
+        id: users.id,
+        passwordHash: users.passwordHash,
+        sessionVersion: users.sessionVersion,
+        shopId: memberships.shopId,
+        processorId: memberships.processorId,
+      })
       .from(users)
       .innerJoin(memberships, and(eq(memberships.userId, users.id), eq(memberships.active, true)))
       .where(and(eq(users.email, attempt.email.trim().toLowerCase()), eq(users.active, true)))

@@ -6,7 +6,10 @@ import { SHOP_ROLES } from '@/lib/auth/roles';
 
 import { Email, PersonName } from './account-contract';
 
-const Roles = z.array(z.enum(SHOP_ROLES)).min(1, 'Choose at least one role.').transform((roles) => SHOP_ROLES.filter((role) => roles.includes(role)));
+const Roles = z
+  .array(z.enum(SHOP_ROLES))
+  .min(1, 'Choose at least one role.')
+  .transform((roles) => SHOP_ROLES.filter((role) => roles.includes(role)));
 
 export const TeamMember = z.object({
   personId: Id,
@@ -89,14 +92,20 @@ export const setPersonActive = declare({
   id: 'setPersonActive',
   method: 'post',
   path: '/people/{personId}/active',
-  summary: 'Close or open a person\'s way into the shop; what they did stays',
+  summary: "Close or open a person's way into the shop; what they did stays",
   side: 'shop',
   permission: 'people.manage',
   input: z.object({ personId: Id, active: z.boolean(), version: z.int() }),
   response: z.object({ version: z.int() }),
 });
 
-export const Colleague = z.object({ personId: Id, name: z.string(), email: z.string(), active: z.boolean(), isMe: z.boolean() });
+export const Colleague = z.object({
+  personId: Id,
+  name: z.string(),
+  email: z.string(),
+  active: z.boolean(),
+  isMe: z.boolean(),
+});
 export type Colleague = z.output<typeof Colleague>;
 
 export const listColleagues = declare({

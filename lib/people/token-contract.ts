@@ -36,8 +36,14 @@ export const createToken = declare({
   side: 'shop',
   permission: 'token.manage',
   input: z.object({
-    name: z.string().trim().min(1, 'Enter a name that says which program uses it.').max(80, 'Use 80 characters or less.'),
-    scopes: z.array(z.enum(TOKEN_SCOPES as [Permission, ...Permission[]])).min(1, 'Choose at least one thing it may do.'),
+    name: z
+      .string()
+      .trim()
+      .min(1, 'Enter a name that says which program uses it.')
+      .max(80, 'Use 80 characters or less.'),
+    scopes: z
+      .array(z.enum(TOKEN_SCOPES as [Permission, ...Permission[]]))
+      .min(1, 'Choose at least one thing it may do.'),
     /** Its last day, in the shop's zone; left out: until it is revoked. */
     lastDay: Day.nullable().default(null),
   }),

@@ -9,7 +9,16 @@ import { TOKEN_SCOPES } from '@/lib/auth/permissions';
 export async function listTokens(ctx: Ctx) {
   authorize(ctx, 'token.manage');
   const tokens = await ctx.tx
-    .select({ id: apiTokens.id, name: apiTokens.name, hint: apiTokens.hint, scopes: apiTokens.scopes, expiresAt: apiTokens.expiresAt, lastUsedAt: apiTokens.lastUsedAt, revokedAt: apiTokens.revokedAt, createdAt: apiTokens.createdAt })
+    .select({
+      id: apiTokens.id,
+      name: apiTokens.name,
+      hint: apiTokens.hint,
+      scopes: apiTokens.scopes,
+      expiresAt: apiTokens.expiresAt,
+      lastUsedAt: apiTokens.lastUsedAt,
+      revokedAt: apiTokens.revokedAt,
+      createdAt: apiTokens.createdAt,
+    })
     .from(apiTokens)
     .where(eq(apiTokens.shopId, shopOf(ctx)))
     .orderBy(desc(apiTokens.id));

@@ -19,7 +19,10 @@ export async function tryPasswordAgain(outside: Outside, { password }: { passwor
   await outside.inTenant((ctx) => atThrottle(ctx, (tx, trier) => giveBackTry(tx, 'sign_in', trier)));
 }
 
-async function atThrottle(ctx: Ctx, work: (tx: Tx, trier: { email: string; address: string }) => Promise<void>): Promise<void> {
+async function atThrottle(
+  ctx: Ctx,
+  work: (tx: Tx, trier: { email: string; address: string }) => Promise<void>,
+): Promise<void> {
   const personId = personOf(ctx.actor);
   if (personId === null) throw new AppError('not_allowed', 'Only a person signs, with their own password.');
   await atDoorOf(ctx.tx, ctx.tenant, async () => {

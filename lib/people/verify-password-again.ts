@@ -14,13 +14,24 @@ import { AppError } from '@/lib/errors';
  */
 export async function verifyPasswordAgain(ctx: Ctx, password: string): Promise<{ id: string; name: string }> {
   const { actor } = ctx;
-  if (actor.kind !== 'person') throw new AppError('not_allowed', 'Only a person signs, with their own password.');
+  if (actor.kind !== 'person')
+    throw new AppError('not_allowed', 'Only a person signs, with their own password.');
   const hash = await atDoorOf(ctx.tx, ctx.tenant, async () => {
-    const [user] = await ctx.tx.select({ passwordHash: users.passwordHash }).from(users).where(and(eq(users.id, actor.userId), eq(users.active, true)));
+    const [user] = await ctx.tx
+      .select({ passwordHash: users.passwordHash })
+      .from(users)
+      .where(and(eq(users.id, actor.userId), eq(users.active, true)));
     return user?.passwordHash ?? null;
   });
-  if (hash === null) throw new AppError('not_allowed', 'You sign in by mailed link and have no password. Set one in your account, then sign.');
+  if (hash === null)
+    throw new AppError(
+      'not_allowed',
+      'You sign in by mailed link and have no password. Set one in your account, then sign.',
+    );
   const right = await verify(hash, password).catch(() => false);
-  if (!right) throw new AppError('bad_input', 'Not signed: this is not your password.', { fields: [{ field: 'password', message: 'This is not your password. Type it again.' }] });
+  if (!right)
+    throw new AppError('bad_input', 'Not signed: this is not your password.', {
+      fields: [{ field: 'password', message: 'This is not your password. Type it again.' }],
+    });
   return { id: actor.userId, name: actor.name };
 }

@@ -35,15 +35,29 @@ export async function batchForMail(ctx: Ctx, batchId: string) {
     .from(batches)
     .innerJoin(shops, eq(shops.id, batches.shopId))
     .innerJoin(processors, eq(processors.id, batches.processorId))
-    .innerJoin(shopProcessors, and(eq(shopProcessors.shopId, batches.shopId), eq(shopProcessors.processorId, batches.processorId)))
+    .innerJoin(
+      shopProcessors,
+      and(eq(shopProcessors.shopId, batches.shopId), eq(shopProcessors.processorId, batches.processorId)),
+    )
     .where(eq(batches.id, batchId));
   if (!batch) throw notFound('batch');
   const lines = await ctx.tx
-    .select({ lineNo: batchLines.lineNo, loadNo: batchLines.loadNo, pieces: batchLines.pieces, frozen: batchLines.frozen })
+    .select({
+      lineNo: batchLines.lineNo,
+      loadNo: batchLines.loadNo,
+      pieces: batchLines.pieces,
+      frozen: batchLines.frozen,
+    })
     .from(batchLines)
     .where(eq(batchLines.batchId, batchId))
     .orderBy(asc(batchLines.lineNo));
-  const [dispatcher] = batch.dispatchedBy === null ? [] : await ctx.tx.select({ name: users.name, email: users.email }).from(users).where(eq(users.id, batch.dispatchedBy));
+  const [dispatcher] =
+    batch.dispatchedBy === null
+      ? []
+      : await ctx.tx
+          .select({ name: users.name, email: users.email })
+          .from(users)
+          .where(eq(users.id, batch.dispatchedBy));
   const contactName = dispatcher?.name ?? (batch.shopPhone === null ? null : batch.shop);
   return {
     ...batch,
@@ -51,7 +65,10 @@ export async function batchForMail(ctx: Ctx, batchId: string) {
     pieces: lines.reduce((sum, line) => sum + line.pieces, 0),
     dispatcherEmail: dispatcher?.email ?? null,
     contact: contactName === null ? null : { name: contactName, phone: batch.shopPhone },
-    asked: askedWords(batch.process, lines.map((line) => line.frozen?.targetCondition ?? null)),
+    asked: askedWords(
+      batch.process,
+      lines.map((line) => line.frozen?.targetCondition ?? null),
+    ),
     specificationWords: specificationWords(batch),
   };
 }

@@ -9,10 +9,17 @@ import { REQUIREMENT_SOURCES } from '@/lib/parts/to-prove';
 export const PAPER_KINDS = ['certificate', 'chart', 'invoice'] as const;
 export type PaperKind = (typeof PAPER_KINDS)[number];
 
-const Count = z.int('Enter a whole number of pieces.').min(0, 'Enter 0 or more.').max(1_000_000, 'Enter 1,000,000 or less.');
+const Count = z
+  .int('Enter a whole number of pieces.')
+  .min(0, 'Enter 0 or more.')
+  .max(1_000_000, 'Enter 1,000,000 or less.');
 
 /** How many of a line; where its pieces are named, which. */
-export const LineCount = z.object({ lineId: Id, pieces: Count, serials: z.array(z.string().max(120)).max(10_000).optional() });
+export const LineCount = z.object({
+  lineId: Id,
+  pieces: Count,
+  serials: z.array(z.string().max(120)).max(10_000).optional(),
+});
 export type LineCount = z.output<typeof LineCount>;
 
 export const PortalLine = z.object({
@@ -75,10 +82,31 @@ export const PortalBatch = z.object({
   piecesBack: z.int(),
   lastBackAt: Moment.nullable(),
   lines: z.array(PortalLine),
-  requirements: z.array(z.object({ id: Id, lineNo: z.int().nullable(), characteristic: z.string(), limit: z.string(), unit: z.string(), source: z.enum(REQUIREMENT_SOURCES), sourceText: z.string() })),
+  requirements: z.array(
+    z.object({
+      id: Id,
+      lineNo: z.int().nullable(),
+      characteristic: z.string(),
+      limit: z.string(),
+      unit: z.string(),
+      source: z.enum(REQUIREMENT_SOURCES),
+      sourceText: z.string(),
+    }),
+  ),
   /** Newest version of each first. */
-  documents: z.array(z.object({ id: Id, kind: z.enum(['traveller', 'purchase_order']), documentVersion: z.int(), statedAt: Moment, changes: z.array(z.string()), fileId: Id.nullable() })),
-  promises: z.array(z.object({ promisedOn: z.string(), note: z.string().nullable(), madeBy: z.string(), madeAt: Moment })),
+  documents: z.array(
+    z.object({
+      id: Id,
+      kind: z.enum(['traveller', 'purchase_order']),
+      documentVersion: z.int(),
+      statedAt: Moment,
+      changes: z.array(z.string()),
+      fileId: Id.nullable(),
+    }),
+  ),
+  promises: z.array(
+    z.object({ promisedOn: z.string(), note: z.string().nullable(), madeBy: z.string(), madeAt: Moment }),
+  ),
   papers: z.array(PortalPaper),
 });
 export type PortalBatch = z.output<typeof PortalBatch>;
@@ -87,7 +115,16 @@ const side = 'portal' as const;
 const OfBatch = z.object({ batchId: Id });
 const answer = { side, permission: 'portal.answer', method: 'post' } as const;
 
-export const getPortalBatch = declare({ id: 'getPortalBatch', method: 'get', path: '/portal/batches/{batchId}', summary: 'One batch as its processor sees it', side, permission: 'portal.read', input: OfBatch, response: PortalBatch });
+export const getPortalBatch = declare({
+  id: 'getPortalBatch',
+  method: 'get',
+  path: '/portal/batches/{batchId}',
+  summary: 'One batch as its processor sees it',
+  side,
+  permission: 'portal.read',
+  input: OfBatch,
+  response: PortalBatch,
+});
 
 export const PortalRow = z.object({
   id: Id,
@@ -126,7 +163,11 @@ export const listPortalBatches = declare({
   side,
   permission: 'portal.read',
   // A work list is read whole; hardly any processor has more than one page of it.
-  input: PageQuery.extend({ limit: z.coerce.number().int().min(1).max(200).default(200), shopId: Id.optional(), show: z.enum(['open', 'finished']).default('open') }),
+  input: PageQuery.extend({
+    limit: z.coerce.number().int().min(1).max(200).default(200),
+    shopId: Id.optional(),
+    show: z.enum(['open', 'finished']).default('open'),
+  }),
   response: pageOf(PortalRow).extend({ zone: z.string(), processor: z.string() }),
 });
 
@@ -149,7 +190,10 @@ export const promiseDay = declare({
   id: 'promiseDay',
   path: '/portal/batches/{batchId}/promises',
   summary: 'Promise a day, or a new one',
-  input: OfBatch.extend({ promisedOn: Day, note: z.string().trim().max(500, 'Write 500 characters or less.').default('') }),
+  input: OfBatch.extend({
+    promisedOn: Day,
+    note: z.string().trim().max(500, 'Write 500 characters or less.').default(''),
+  }),
   response: Done,
 });
 
@@ -184,9 +228,25 @@ export const reportTrouble = declare({
   response: z.object({ id: Id }),
 });
 
-export const listPortalMessages = declare({ id: 'listPortalMessages', method: 'get', path: '/portal/batches/{batchId}/messages', summary: 'What shop and processor have said about a batch', side, permission: 'portal.read', input: OfBatch, response: Thread });
+export const listPortalMessages = declare({
+  id: 'listPortalMessages',
+  method: 'get',
+  path: '/portal/batches/{batchId}/messages',
+  summary: 'What shop and processor have said about a batch',
+  side,
+  permission: 'portal.read',
+  input: OfBatch,
+  response: Thread,
+});
 
-export const writeToShop = declare({ ...answer, id: 'writeToShop', path: '/portal/batches/{batchId}/messages', summary: 'Ask the shop, answer it, or leave a note; it goes out as a mail too', input: NewMessage, response: z.object({ id: Id }) });
+export const writeToShop = declare({
+  ...answer,
+  id: 'writeToShop',
+  path: '/portal/batches/{batchId}/messages',
+  summary: 'Ask the shop, answer it, or leave a note; it goes out as a mail too',
+  input: NewMessage,
+  response: z.object({ id: Id }),
+});
 
 export const sendPaper = declare({
   ...answer,

@@ -16,16 +16,33 @@ import { readPapers } from './read-papers';
 /** One batch with all that its processor is to see and do. Read with the processor's own eyes, but for the counts. */
 export async function getPortalBatch(ctx: Ctx, { batchId }: { batchId: string }) {
   authorize(ctx, 'portal.read');
-  const { shopId, shopName, shopPhone, zone, specification, specificationRevision, classType, process, dispatchedAt, ...batch } = await readHead(ctx, batchId);
+  const {
+    shopId,
+    shopName,
+    shopPhone,
+    zone,
+    specification,
+    specificationRevision,
+    classType,
+    process,
+    dispatchedAt,
+    ...batch
+  } = await readHead(ctx, batchId);
   if (dispatchedAt === null) throw notFound('batch');
-  const { standing, contactName } = await inOwningShop(ctx, shopId, async (inner) => ({ standing: await readLineStanding(inner, batchId), contactName: await dispatcherName(inner, batchId) }));
+  const { standing, contactName } = await inOwningShop(ctx, shopId, async (inner) => ({
+    standing: await readLineStanding(inner, batchId),
+    contactName: await dispatcherName(inner, batchId),
+  }));
   const lines = await readLines(ctx, batchId, standing);
   return {
     ...batch,
     dispatchedAt,
     shop: { id: shopId, name: shopName, phone: shopPhone, zone },
     contactName,
-    asked: askedWords(process, lines.map((line) => line.targetCondition)),
+    asked: askedWords(
+      process,
+      lines.map((line) => line.targetCondition),
+    ),
     specification: specificationWords({ specification, specificationRevision, classType }),
     lines,
     requirements: await readRequirements(ctx, batchId),
@@ -74,13 +91,23 @@ async function readHead(ctx: Ctx, batchId: string) {
 }
 
 async function dispatcherName(ctx: Ctx, batchId: string): Promise<string | null> {
-  const [found] = await ctx.tx.select({ name: users.name }).from(batches).innerJoin(users, eq(users.id, batches.dispatchedBy)).where(eq(batches.id, batchId));
+  const [found] = await ctx.tx
+    .select({ name: users.name })
+    .from(batches)
+    .innerJoin(users, eq(users.id, batches.dispatchedBy))
+    .where(eq(batches.id, batchId));
   return found?.name ?? null;
 }
 
 async function readLines(ctx: Ctx, batchId: string, standing: readonly LineStanding[]) {
   const lines = await ctx.tx
-    .select({ id: batchLines.id, lineNo: batchLines.lineNo, pieces: batchLines.pieces, loadNo: batchLines.loadNo, frozen: batchLines.frozen })
+    .select({
+      id: batchLines.id,
+      lineNo: batchLines.lineNo,
+      pieces: batchLines.pieces,
+      loadNo: batchLines.loadNo,
+      frozen: batchLines.frozen,
+    })
     .from(batchLines)
     .where(eq(batchLines.batchId, batchId))
     .orderBy(asc(batchLines.lineNo));
@@ -105,7 +132,15 @@ async function readLines(ctx: Ctx, batchId: string, standing: readonly LineStand
 
 const readRequirements = (ctx: Ctx, batchId: string) =>
   ctx.tx
-    .select({ id: requirements.id, lineNo: batchLines.lineNo, characteristic: requirements.characteristic, limit: requirements.limit, unit: requirements.unit, source: requirements.source, sourceText: requirements.sourceText })
+    .select({
+      id: requirements.id,
+      lineNo: batchLines.lineNo,
+      characteristic: requirements.characteristic,
+      limit: requirements.limit,
+      unit: requirements.unit,
+      source: requirements.source,
+      sourceText: requirements.sourceText,
+    })
     .from(requirements)
     .leftJoin(batchLines, eq(batchLines.id, requirements.lineId))
     .where(eq(requirements.batchId, batchId))
@@ -113,14 +148,26 @@ const readRequirements = (ctx: Ctx, batchId: string) =>
 
 const readDocuments = (ctx: Ctx, batchId: string) =>
   ctx.tx
-    .select({ id: batchDocuments.id, kind: batchDocuments.kind, documentVersion: batchDocuments.documentVersion, statedAt: batchDocuments.statedAt, changes: batchDocuments.changes, fileId: batchDocuments.fileId })
+    .select({
+      id: batchDocuments.id,
+      kind: batchDocuments.kind,
+      documentVersion: batchDocuments.documentVersion,
+      statedAt: batchDocuments.statedAt,
+      changes: batchDocuments.changes,
+      fileId: batchDocuments.fileId,
+    })
     .from(batchDocuments)
     .where(eq(batchDocuments.batchId, batchId))
     .orderBy(desc(batchDocuments.documentVersion), asc(batchDocuments.kind));
 
 const readPromises = (ctx: Ctx, batchId: string) =>
   ctx.tx
-    .select({ promisedOn: promises.promisedOn, note: promises.note, madeBy: promises.madeBy, madeAt: promises.madeAt })
+    .select({
+      promisedOn: promises.promisedOn,
+      note: promises.note,
+      madeBy: promises.madeBy,
+      madeAt: promises.madeAt,
+    })
     .from(promises)
     .where(eq(promises.batchId, batchId))
     .orderBy(desc(promises.madeAt), desc(promises.id));

@@ -44,7 +44,12 @@ export const readBatchLink = declare({
   response: LinkFace,
 });
 
-export const BatchLinkRow = z.object({ id: Id, createdAt: Moment, firstOpenedAt: Moment.nullable(), withdrawnAt: Moment.nullable() });
+export const BatchLinkRow = z.object({
+  id: Id,
+  createdAt: Moment,
+  firstOpenedAt: Moment.nullable(),
+  withdrawnAt: Moment.nullable(),
+});
 
 export const listBatchLinks = declare({
   id: 'listBatchLinks',
@@ -54,7 +59,12 @@ export const listBatchLinks = declare({
   side: 'shop',
   permission: 'batch.read',
   input: z.object({ batchId: Id }),
-  response: z.object({ links: z.array(BatchLinkRow), deskEmail: z.string(), zone: z.string(), ended: z.boolean() }),
+  response: z.object({
+    links: z.array(BatchLinkRow),
+    deskEmail: z.string(),
+    zone: z.string(),
+    ended: z.boolean(),
+  }),
 });
 
 export const sendBatchLink = declare({

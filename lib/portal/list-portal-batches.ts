@@ -17,7 +17,10 @@ import type { listPortalBatches as declaration } from './contract';
 const FINISHED: Stage[] = ['settled', 'stocked', 'cancelled'];
 
 /** The work list of a processor, over all shops that send it parts. */
-export async function listPortalBatches(ctx: Ctx, { after, limit, shopId, show }: z.output<(typeof declaration)['input']>) {
+export async function listPortalBatches(
+  ctx: Ctx,
+  { after, limit, shopId, show }: z.output<(typeof declaration)['input']>,
+) {
   authorize(ctx, 'portal.read');
   const [processor] = await ctx.tx.select({ name: processors.name, zone: processors.zone }).from(processors);
   if (!processor) throw notFound('processor');
@@ -45,11 +48,20 @@ export async function listPortalBatches(ctx: Ctx, { after, limit, shopId, show }
     })
     .from(batches)
     .innerJoin(shops, eq(shops.id, batches.shopId))
-    .where(and(show === 'open' ? notInArray(batches.stage, FINISHED) : inArray(batches.stage, FINISHED), shopId === undefined ? undefined : eq(batches.shopId, shopId), after === undefined ? undefined : lt(batches.id, after)))
+    .where(
+      and(
+        show === 'open' ? notInArray(batches.stage, FINISHED) : inArray(batches.stage, FINISHED),
+        shopId === undefined ? undefined : eq(batches.shopId, shopId),
+        after === undefined ? undefined : lt(batches.id, after),
+      ),
+    )
     .orderBy(desc(batches.id))
     .limit(limit + 1);
   const { rows, next } = toPage(found, limit, (row) => row.id);
-  const lines = await readFrozen(ctx, rows.map((row) => row.id));
+  const lines = await readFrozen(
+    ctx,
+    rows.map((row) => row.id),
+  );
   return {
     ...{ processor: processor.name, zone: processor.zone, next },
     rows: rows.map(({ process, dispatchedAt, ...row }) => {
@@ -57,7 +69,10 @@ export async function listPortalBatches(ctx: Ctx, { after, limit, shopId, show }
       return {
         ...row,
         dispatchedAt: dispatchedAt ?? ctx.now,
-        asked: askedWords(process, frozen.map((line) => line.targetCondition)),
+        asked: askedWords(
+          process,
+          frozen.map((line) => line.targetCondition),
+        ),
         parts: once(frozen.map((line) => line.partName)),
         materials: once(frozen.map((line) => line.material)),
         thicknesses: once(frozen.flatMap((line) => line.thickness ?? [])),

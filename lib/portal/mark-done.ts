@@ -13,13 +13,28 @@ import { onBatch } from './on-batch';
 export async function markDone(ctx: Ctx, { batchId, done }: { batchId: string; done: boolean }) {
   authorize(ctx, 'portal.answer');
   return onBatch(ctx, { batchId, nothing: 'Do not work on it' }, async (inner, { number }) => {
-    const [batch] = await inner.tx.select({ acknowledgedAt: batches.acknowledgedAt, markedDoneAt: batches.markedDoneAt, shippedAt: batches.shippedAt }).from(batches).where(eq(batches.id, batchId));
-    if (!batch?.acknowledgedAt) throw new AppError('conflict', `Say first how many pieces of ${number} you have.`);
+    const [batch] = await inner.tx
+      .select({
+        acknowledgedAt: batches.acknowledgedAt,
+        markedDoneAt: batches.markedDoneAt,
+        shippedAt: batches.shippedAt,
+      })
+      .from(batches)
+      .where(eq(batches.id, batchId));
+    if (!batch?.acknowledgedAt)
+      throw new AppError('conflict', `Say first how many pieces of ${number} you have.`);
     if ((batch.markedDoneAt !== null) === done) return { done: true as const };
-    if (!done && batch.shippedAt !== null) throw new AppError('conflict', `${number} is on its way back. Report trouble if it should not be.`);
+    if (!done && batch.shippedAt !== null)
+      throw new AppError('conflict', `${number} is on its way back. Report trouble if it should not be.`);
     const markedDoneAt = done ? ctx.now : null;
     await inner.tx.update(batches).set({ markedDoneAt }).where(eq(batches.id, batchId));
-    await recordAudit(inner, { action: done ? 'batch.mark_done' : 'batch.mark_not_done', entity: 'batch', entityId: batchId, before: { markedDoneAt: batch.markedDoneAt }, after: { markedDoneAt } });
+    await recordAudit(inner, {
+      action: done ? 'batch.mark_done' : 'batch.mark_not_done',
+      entity: 'batch',
+      entityId: batchId,
+      before: { markedDoneAt: batch.markedDoneAt },
+      after: { markedDoneAt },
+    });
     await refreshStanding(inner, batchId);
     return { done: true as const };
   });

@@ -12,8 +12,14 @@ import { lockSentBatch, type LockedBatch } from '@/lib/receipts/lock-batch';
  *
  * @param nothing what cannot be once the shop has cancelled it: "Do not work on it".
  */
-export async function onBatch<T>(ctx: Ctx, { batchId, nothing }: { batchId: string; nothing: string }, work: (inner: Ctx, batch: LockedBatch) => Promise<T>): Promise<T> {
+export async function onBatch<T>(
+  ctx: Ctx,
+  { batchId, nothing }: { batchId: string; nothing: string },
+  work: (inner: Ctx, batch: LockedBatch) => Promise<T>,
+): Promise<T> {
   const [seen] = await ctx.tx.select({ shopId: batches.shopId }).from(batches).where(eq(batches.id, batchId));
   if (!seen) throw notFound('batch');
-  return inOwningShop(ctx, seen.shopId, async (inner) => work(inner, await lockSentBatch(inner, batchId, nothing)));
+  return inOwningShop(ctx, seen.shopId, async (inner) =>
+    work(inner, await lockSentBatch(inner, batchId, nothing)),
+  );
 }

@@ -14,7 +14,14 @@ interface Paper {
 /** What a mail to the processor says beside what stands in the batch. Without `url` it carries the link that stands. */
 export type BatchMail =
   | { template: 'dispatch'; version?: number; url?: string; papers?: readonly Paper[]; to?: string }
-  | { template: 'dispatch-reissued'; changes: readonly string[]; version: number; url?: string; papers?: readonly Paper[]; to?: string }
+  | {
+      template: 'dispatch-reissued';
+      changes: readonly string[];
+      version: number;
+      url?: string;
+      papers?: readonly Paper[];
+      to?: string;
+    }
   | { template: 'batch-cancelled'; reason: string; to?: string }
   | { template: 'batch-link'; url: string; to?: string };
 
@@ -24,20 +31,44 @@ export async function queueBatchMail(ctx: Ctx, batchId: string, mail: BatchMail)
   const to = mail.to ?? batch.deskEmail;
   const ofBatch = ofBatchProps(ctx, batch);
   // The job that made the papers is nobody: answers go to whoever sent the batch.
-  const replyTo = personOf(ctx.actor) === null && batch.dispatcherEmail !== null ? { replyTo: batch.dispatcherEmail } : {};
+  const replyTo =
+    personOf(ctx.actor) === null && batch.dispatcherEmail !== null ? { replyTo: batch.dispatcherEmail } : {};
   if (mail.template === 'batch-cancelled') {
-    return queueMail(ctx, { template: mail.template, to, ...replyTo, props: { ...ofBatch, reason: mail.reason } });
+    return queueMail(ctx, {
+      template: mail.template,
+      to,
+      ...replyTo,
+      props: { ...ofBatch, reason: mail.reason },
+    });
   }
   if (mail.template === 'batch-link') {
     const { stage, asked, specificationWords: specification, wantedBackOn } = batch;
-    return queueMail(ctx, { template: mail.template, to, ...replyTo, props: { ...ofBatch, stage, asked, specification, wantedBackOn, url: mail.url } });
+    return queueMail(ctx, {
+      template: mail.template,
+      to,
+      ...replyTo,
+      props: { ...ofBatch, stage, asked, specification, wantedBackOn, url: mail.url },
+    });
   }
   const papers = mail.papers ?? [];
   const url = mail.url ?? (await standingBatchUrl(ctx, { batchId, processorId: batch.processorId }));
-  const props = { ...ofBatch, ...dispatchProps(batch), url, version: mail.version ?? 1, attached: papers.map((paper) => paper.name) };
+  const props = {
+    ...ofBatch,
+    ...dispatchProps(batch),
+    url,
+    version: mail.version ?? 1,
+    attached: papers.map((paper) => paper.name),
+  };
   const attach = papers.map((paper) => paper.fileId);
-  if (mail.template === 'dispatch') return queueMail(ctx, { template: mail.template, to, ...replyTo, attach, props });
-  return queueMail(ctx, { template: mail.template, to, ...replyTo, attach, props: { ...props, changes: [...mail.changes] } });
+  if (mail.template === 'dispatch')
+    return queueMail(ctx, { template: mail.template, to, ...replyTo, attach, props });
+  return queueMail(ctx, {
+    template: mail.template,
+    to,
+    ...replyTo,
+    attach,
+    props: { ...props, changes: [...mail.changes] },
+  });
 }
 
 /** What every mail about a batch says. */
@@ -54,7 +85,9 @@ export function ofBatchProps(ctx: Pick<Ctx, 'now'>, batch: BatchForMail) {
   };
 }
 
-function dispatchProps(batch: BatchForMail): Pick<MailGiven<'dispatch'>, 'asked' | 'specification' | 'wantedBackOn' | 'lines' | 'cautions' | 'note'> {
+function dispatchProps(
+  batch: BatchForMail,
+): Pick<MailGiven<'dispatch'>, 'asked' | 'specification' | 'wantedBackOn' | 'lines' | 'cautions' | 'note'> {
   const cautions = new Set(batch.lines.flatMap(({ frozen }) => frozen?.stepNote ?? []));
   return {
     asked: batch.asked,
@@ -63,7 +96,10 @@ function dispatchProps(batch: BatchForMail): Pick<MailGiven<'dispatch'>, 'asked'
     lines: batch.lines.map(({ lineNo, loadNo, pieces, frozen }) => ({
       lineNo,
       part: frozen === null ? `line ${lineNo}` : `${frozen.partNumber} ${frozen.partRevision}`,
-      description: frozen === null ? '' : [frozen.partName, frozen.material, frozen.thickness].filter(Boolean).join(', '),
+      description:
+        frozen === null
+          ? ''
+          : [frozen.partName, frozen.material, frozen.thickness].filter(Boolean).join(', '),
       loadNo,
       pieces,
     })),

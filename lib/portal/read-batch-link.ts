@@ -41,7 +41,14 @@ export async function readBatchLink(ctx: Ctx, { token }: { token: string }) {
   const { withdrawnAt, specificationRevision, classType, ...batch } = found;
   return {
     state: stateOf(withdrawnAt, batch.stage),
-    batch: { ...batch, specification: specificationWords({ specification: batch.specification, specificationRevision, classType }) },
+    batch: {
+      ...batch,
+      specification: specificationWords({
+        specification: batch.specification,
+        specificationRevision,
+        classType,
+      }),
+    },
   };
 }
 

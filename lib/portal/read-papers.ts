@@ -12,12 +12,26 @@ const file = { id: files.id, name: files.name, size: files.size, mediaType: file
 
 /** The papers of a batch, newest first, with what the shop has made of each. */
 export async function readPapers(ctx: Ctx, { batchId, shopId }: { batchId: string; shopId: string }) {
-  const found = [...(await readCertificates(ctx, batchId)), ...(await readCharts(ctx, batchId)), ...(await readInvoices(ctx, batchId))];
+  const found = [
+    ...(await readCertificates(ctx, batchId)),
+    ...(await readCharts(ctx, batchId)),
+    ...(await readInvoices(ctx, batchId)),
+  ];
   const { accepted, paid } = await inOwningShop(ctx, shopId, (inner) => readVerdicts(inner, batchId));
   return found
     .map(({ setAside, approvedAt, ...paper }) => {
       const acceptedPieces = accepted.get(paper.id) ?? null;
-      return { ...paper, acceptedPieces, state: stateOf({ kind: paper.kind, setAside, approvedAt, acceptedPieces, isPaid: paid.has(paper.id) }) };
+      return {
+        ...paper,
+        acceptedPieces,
+        state: stateOf({
+          kind: paper.kind,
+          setAside,
+          approvedAt,
+          acceptedPieces,
+          isPaid: paid.has(paper.id),
+        }),
+      };
     })
     .sort((one, other) => other.sentAt.getTime() - one.sentAt.getTime());
 }
@@ -43,11 +57,24 @@ function stateOf({ kind, setAside, approvedAt, acceptedPieces, isPaid }: Facts):
 
 async function readCertificates(ctx: Ctx, batchId: string) {
   const rows = await ctx.tx
-    .select({ id: certificates.id, file, number: certificates.number, sentBy: certificates.sentBy, sentAt: certificates.createdAt, setAsideAt: certificates.setAsideAt, reason: certificates.setAsideReason })
+    .select({
+      id: certificates.id,
+      file,
+      number: certificates.number,
+      sentBy: certificates.sentBy,
+      sentAt: certificates.createdAt,
+      setAsideAt: certificates.setAsideAt,
+      reason: certificates.setAsideReason,
+    })
     .from(certificates)
     .leftJoin(files, eq(files.id, certificates.fileId))
     .where(eq(certificates.batchId, batchId));
-  return rows.map(({ setAsideAt, ...row }) => ({ ...row, kind: 'certificate' as const, setAside: setAsideAt !== null, approvedAt: null }));
+  return rows.map(({ setAsideAt, ...row }) => ({
+    ...row,
+    kind: 'certificate' as const,
+    setAside: setAsideAt !== null,
+    approvedAt: null,
+  }));
 }
 
 async function readCharts(ctx: Ctx, batchId: string) {
@@ -56,16 +83,36 @@ async function readCharts(ctx: Ctx, batchId: string) {
     .from(charts)
     .leftJoin(files, eq(files.id, charts.fileId))
     .where(eq(charts.batchId, batchId));
-  return rows.map((row) => ({ ...row, kind: 'chart' as const, number: null, reason: null, setAside: false, approvedAt: null }));
+  return rows.map((row) => ({
+    ...row,
+    kind: 'chart' as const,
+    number: null,
+    reason: null,
+    setAside: false,
+    approvedAt: null,
+  }));
 }
 
 async function readInvoices(ctx: Ctx, batchId: string) {
   const rows = await ctx.tx
-    .select({ id: invoices.id, file, number: invoices.number, sentBy: invoices.sentBy, sentAt: invoices.createdAt, refusedAt: invoices.refusedAt, reason: invoices.refusedReason, approvedAt: invoices.approvedAt })
+    .select({
+      id: invoices.id,
+      file,
+      number: invoices.number,
+      sentBy: invoices.sentBy,
+      sentAt: invoices.createdAt,
+      refusedAt: invoices.refusedAt,
+      reason: invoices.refusedReason,
+      approvedAt: invoices.approvedAt,
+    })
     .from(invoices)
     .leftJoin(files, eq(files.id, invoices.fileId))
     .where(eq(invoices.batchId, batchId));
-  return rows.map(({ refusedAt, ...row }) => ({ ...row, kind: 'invoice' as const, setAside: refusedAt !== null }));
+  return rows.map(({ refusedAt, ...row }) => ({
+    ...row,
+    kind: 'invoice' as const,
+    setAside: refusedAt !== null,
+  }));
 }
 
 /** What stands in the shop's own books: for how many pieces a certificate was signed, and which invoices are paid. */
@@ -81,5 +128,8 @@ async function readVerdicts(ctx: Ctx, batchId: string) {
     .from(payments)
     .innerJoin(invoices, eq(invoices.id, payments.invoiceId))
     .where(sql`${invoices.batchId} = ${batchId} and ${payments.state} = 'succeeded'`);
-  return { accepted: new Map(signed.map((row) => [row.id, row.pieces])), paid: new Set(paid.map((row) => row.id)) };
+  return {
+    accepted: new Map(signed.map((row) => [row.id, row.pieces])),
+    paid: new Set(paid.map((row) => row.id)),
+  };
 }

@@ -15,17 +15,32 @@ import { queueBatchMail } from './queue-batch-mail';
 export async function sendBatchLink(ctx: Ctx, { batchId, to }: { batchId: string; to?: string | undefined }) {
   authorize(ctx, 'batch.dispatch');
   const [batch] = await ctx.tx
-    .select({ number: batches.number, stage: batches.stage, dispatchedAt: batches.dispatchedAt, processorId: batches.processorId })
+    .select({
+      number: batches.number,
+      stage: batches.stage,
+      dispatchedAt: batches.dispatchedAt,
+      processorId: batches.processorId,
+    })
     .from(batches)
     .where(eq(batches.id, batchId))
     .for('update');
   if (!batch) throw notFound('batch');
-  if (batch.dispatchedAt === null) throw new AppError('conflict', `${batch.number} has not left yet. Its processor gets the link with the dispatch.`);
-  if (LINK_ENDS_AT.includes(batch.stage)) throw new AppError('conflict', `${batch.number} is ${batch.stage}, so a link to it would open nothing.`);
+  if (batch.dispatchedAt === null)
+    throw new AppError(
+      'conflict',
+      `${batch.number} has not left yet. Its processor gets the link with the dispatch.`,
+    );
+  if (LINK_ENDS_AT.includes(batch.stage))
+    throw new AppError('conflict', `${batch.number} is ${batch.stage}, so a link to it would open nothing.`);
 
   const sentTo = to ?? (await batchForMail(ctx, batchId)).deskEmail;
   const { linkId, url } = await makeBatchLink(ctx, { batchId, processorId: batch.processorId });
   await queueBatchMail(ctx, batchId, { template: 'batch-link', url, to: sentTo });
-  await recordAudit(ctx, { action: 'batch.send_link', entity: 'batch', entityId: batchId, after: { linkId, to: sentTo } });
+  await recordAudit(ctx, {
+    action: 'batch.send_link',
+    entity: 'batch',
+    entityId: batchId,
+    after: { linkId, to: sentTo },
+  });
   return { sentTo };
 }

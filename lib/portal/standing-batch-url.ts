@@ -11,7 +11,10 @@ import { makeBatchLink } from './make-batch-link';
  * The address that a mail about the batch carries: its newest standing link. Null where the shop has withdrawn them
  * all, because a mail must not give back what was taken away.
  */
-export async function standingBatchUrl(ctx: Ctx, { batchId, processorId }: { batchId: string; processorId: string }): Promise<string | null> {
+export async function standingBatchUrl(
+  ctx: Ctx,
+  { batchId, processorId }: { batchId: string; processorId: string },
+): Promise<string | null> {
   const standing = await ctx.tx
     .select({ id: batchLinks.id, tokenHash: batchLinks.tokenHash })
     .from(batchLinks)

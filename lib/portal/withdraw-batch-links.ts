@@ -17,6 +17,12 @@ export async function withdrawBatchLinks(ctx: Ctx, { batchId }: { batchId: strin
     .where(and(eq(batchLinks.batchId, batchId), isNull(batchLinks.withdrawnAt)))
     .returning({ id: batchLinks.id });
   // Pressed a second time there is nothing left to withdraw, which is what was wanted.
-  if (withdrawn.length > 0) await recordAudit(ctx, { action: 'batch.withdraw_links', entity: 'batch', entityId: batchId, after: { links: withdrawn.map((link) => link.id) } });
+  if (withdrawn.length > 0)
+    await recordAudit(ctx, {
+      action: 'batch.withdraw_links',
+      entity: 'batch',
+      entityId: batchId,
+      after: { links: withdrawn.map((link) => link.id) },
+    });
   return { done: true as const };
 }

@@ -17,14 +17,23 @@ export async function writeToShop(ctx: Ctx, message: NewMessage) {
 }
 
 /** Something is wrong: burrs, a cracked part, a furnace that failed. The shop is told at once. */
-export async function reportTrouble(ctx: Ctx, { batchId, body, lineId }: { batchId: string; body: string; lineId: string | null }) {
+export async function reportTrouble(
+  ctx: Ctx,
+  { batchId, body, lineId }: { batchId: string; body: string; lineId: string | null },
+) {
   authorize(ctx, 'portal.answer');
-  return inShopOfSeen(ctx, batchId, (inner) => addMessage(inner, { batchId, body, lineId, side: 'processor', kind: 'trouble' }));
+  return inShopOfSeen(ctx, batchId, (inner) =>
+    addMessage(inner, { batchId, body, lineId, side: 'processor', kind: 'trouble' }),
+  );
 }
 
 export async function listPortalMessages(ctx: Ctx, { batchId }: { batchId: string }) {
   authorize(ctx, 'portal.read');
-  const [batch] = await ctx.tx.select({ other: shops.name, zone: shops.zone }).from(batches).innerJoin(shops, eq(shops.id, batches.shopId)).where(eq(batches.id, batchId));
+  const [batch] = await ctx.tx
+    .select({ other: shops.name, zone: shops.zone })
+    .from(batches)
+    .innerJoin(shops, eq(shops.id, batches.shopId))
+    .where(eq(batches.id, batchId));
   if (!batch) throw notFound('batch');
   return { ...(await readThread(ctx, batchId)), ...batch, closed: null };
 }

@@ -22,18 +22,48 @@ export async function addProcessor(ctx: Ctx, given: z.output<(typeof declaration
   const contactEmail = given.contactEmail ?? given.email;
   const [linked] = await ctx.tx
     .insert(shopProcessors)
-    .values({ shopId: shopOf(ctx), processorId, contactName: given.contactName, contactEmail, note: given.note, createdAt: ctx.now })
+    .values({
+      shopId: shopOf(ctx),
+      processorId,
+      contactName: given.contactName,
+      contactEmail,
+      note: given.note,
+      createdAt: ctx.now,
+    })
     .onConflictDoNothing()
     .returning({ processorId: shopProcessors.processorId });
-  if (!linked) throw new AppError('conflict', 'This processor is on your list already.', { fields: [{ field: 'email', message: 'A processor with this e-mail is on your list already.' }] });
-  await recordAudit(ctx, { action: 'processor.add', entity: 'processor', entityId: processorId, after: { name: given.name, email: given.email, contactName: given.contactName, contactEmail, note: given.note } });
+  if (!linked)
+    throw new AppError('conflict', 'This processor is on your list already.', {
+      fields: [{ field: 'email', message: 'A processor with this e-mail is on your list already.' }],
+    });
+  await recordAudit(ctx, {
+    action: 'processor.add',
+    entity: 'processor',
+    entityId: processorId,
+    after: {
+      name: given.name,
+      email: given.email,
+      contactName: given.contactName,
+      contactEmail,
+      note: given.note,
+    },
+  });
   return { processorId };
 }
 
-async function findOrMake(ctx: Ctx, { name, email, phone }: z.output<(typeof declaration)['input']>): Promise<string> {
+async function findOrMake(
+  ctx: Ctx,
+  { name, email, phone }: z.output<(typeof declaration)['input']>,
+): Promise<string> {
   const id = newId();
-  await ctx.tx.insert(processors).values({ id, name, email, phone, createdAt: ctx.now }).onConflictDoNothing({ target: processors.email });
-  const [known] = await ctx.tx.select({ id: processors.id }).from(processors).where(eq(processors.email, email));
+  await ctx.tx
+    .insert(processors)
+    .values({ id, name, email, phone, createdAt: ctx.now })
+    .onConflictDoNothing({ target: processors.email });
+  const [known] = await ctx.tx
+    .select({ id: processors.id })
+    .from(processors)
+    .where(eq(processors.email, email));
   if (!known) throw new Error('a processor was neither found nor made');
   return known.id;
 }

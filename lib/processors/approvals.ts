@@ -11,24 +11,49 @@ import { newId } from '@/lib/ids';
 import type { addApproval as addDeclaration, withdrawApproval as withdrawDeclaration } from './contract';
 import { getProcessor } from './queries';
 
-export async function addApproval(ctx: Ctx, { processorId, ...given }: z.output<(typeof addDeclaration)['input']>) {
+export async function addApproval(
+  ctx: Ctx,
+  { processorId, ...given }: z.output<(typeof addDeclaration)['input']>,
+) {
   authorize(ctx, 'processor.edit');
   await getProcessor(ctx, { processorId });
   const approvalId = newId();
-  await ctx.tx.insert(approvals).values({ id: approvalId, shopId: shopOf(ctx), processorId, ...given, createdAt: ctx.now });
-  await recordAudit(ctx, { action: 'processor.approve', entity: 'processor', entityId: processorId, after: given });
+  await ctx.tx
+    .insert(approvals)
+    .values({ id: approvalId, shopId: shopOf(ctx), processorId, ...given, createdAt: ctx.now });
+  await recordAudit(ctx, {
+    action: 'processor.approve',
+    entity: 'processor',
+    entityId: processorId,
+    after: given,
+  });
   return { approvalId };
 }
 
 /** From this moment nothing more is dispatched under it; the record of what was stays as it is. */
-export async function withdrawApproval(ctx: Ctx, { processorId, approvalId, reason }: z.output<(typeof withdrawDeclaration)['input']>) {
+export async function withdrawApproval(
+  ctx: Ctx,
+  { processorId, approvalId, reason }: z.output<(typeof withdrawDeclaration)['input']>,
+) {
   authorize(ctx, 'processor.edit');
   const [withdrawn] = await ctx.tx
     .update(approvals)
     .set({ withdrawnAt: ctx.now })
-    .where(and(eq(approvals.id, approvalId), eq(approvals.processorId, processorId), isNull(approvals.withdrawnAt)))
+    .where(
+      and(
+        eq(approvals.id, approvalId),
+        eq(approvals.processorId, processorId),
+        isNull(approvals.withdrawnAt),
+      ),
+    )
     .returning({ reference: approvals.reference });
   if (!withdrawn) throw notFound('approval');
-  await recordAudit(ctx, { action: 'processor.withdraw_approval', entity: 'processor', entityId: processorId, before: { reference: withdrawn.reference }, after: { reason } });
+  await recordAudit(ctx, {
+    action: 'processor.withdraw_approval',
+    entity: 'processor',
+    entityId: processorId,
+    before: { reference: withdrawn.reference },
+    after: { reason },
+  });
   return { done: true as const };
 }

@@ -6,7 +6,13 @@ import { PROCESSES } from '@/lib/trade/process';
 import { Email } from '@/lib/people/account-contract';
 
 const Name = z.string().trim().min(1, 'Enter the name.').max(160, 'Use 160 characters or less.');
-const Optional = (most: number) => z.string().trim().max(most, `Use ${most} characters or less.`).transform((text) => (text === '' ? null : text)).nullable();
+const Optional = (most: number) =>
+  z
+    .string()
+    .trim()
+    .max(most, `Use ${most} characters or less.`)
+    .transform((text) => (text === '' ? null : text))
+    .nullable();
 
 export const ProcessorRow = z.object({
   processorId: Id,
@@ -104,7 +110,14 @@ export const updateProcessor = declare({
   summary: 'Change whom we deal with there, our note, and whether we still do',
   side: 'shop',
   permission: 'processor.edit',
-  input: z.object({ processorId: Id, contactName: Optional(120), contactEmail: Email, note: Optional(2000), active: z.boolean(), version: z.int() }),
+  input: z.object({
+    processorId: Id,
+    contactName: Optional(120),
+    contactEmail: Email,
+    note: Optional(2000),
+    active: z.boolean(),
+    version: z.int(),
+  }),
   response: z.object({ version: z.int() }),
 });
 
@@ -118,14 +131,21 @@ export const addApproval = declare({
   input: z
     .object({
       processorId: Id,
-      reference: z.string().trim().min(1, 'Enter the number or name of the approval.').max(80, 'Use 80 characters or less.'),
+      reference: z
+        .string()
+        .trim()
+        .min(1, 'Enter the number or name of the approval.')
+        .max(80, 'Use 80 characters or less.'),
       processes: z.array(z.enum(PROCESSES)).min(1, 'Choose at least one process.'),
       /** Left empty: any specification for these processes. */
       specifications: z.array(z.string().trim().min(1).max(60)).max(60).default([]),
       validFrom: Day,
       validTo: Day,
     })
-    .refine(({ validFrom, validTo }) => validFrom <= validTo, { path: ['validTo'], message: 'The last day is before the first. Enter a later day.' }),
+    .refine(({ validFrom, validTo }) => validFrom <= validTo, {
+      path: ['validTo'],
+      message: 'The last day is before the first. Enter a later day.',
+    }),
   response: z.object({ approvalId: Id }),
 });
 
@@ -136,7 +156,11 @@ export const withdrawApproval = declare({
   summary: 'Withdraw an approval from today; what was dispatched under it stays',
   side: 'shop',
   permission: 'processor.edit',
-  input: z.object({ processorId: Id, approvalId: Id, reason: z.string().trim().min(1, 'Enter the reason.').max(400, 'Use 400 characters or less.') }),
+  input: z.object({
+    processorId: Id,
+    approvalId: Id,
+    reason: z.string().trim().min(1, 'Enter the reason.').max(400, 'Use 400 characters or less.'),
+  }),
   response: Done,
 });
 

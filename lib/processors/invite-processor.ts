@@ -26,13 +26,36 @@ import { getProcessor } from './queries';
 export async function inviteProcessor(ctx: Ctx, { processorId }: z.output<(typeof declaration)['input']>) {
   authorize(ctx, 'processor.edit');
   const { name, email } = await getProcessor(ctx, { processorId });
-  const [shop] = await ctx.tx.select({ name: shops.name, zone: shops.zone }).from(shops).where(eq(shops.id, shopOf(ctx)));
+  const [shop] = await ctx.tx
+    .select({ name: shops.name, zone: shops.zone })
+    .from(shops)
+    .where(eq(shops.id, shopOf(ctx)));
   if (!shop) throw new Error('a shop without a row');
   const token = newToken();
   const expiresAt = new Date(ctx.now.getTime() + INVITATION_DAYS * 86_400_000);
-  const invitationId = await atDoorOf(ctx.tx, ctx.tenant, () => replaceInvitation(ctx, { processorId, name, email, token, expiresAt }));
-  await queueMail(ctx, { template: 'invitation', to: email, props: { organisation: name, inviter: `${ctx.actor.name} of ${shop.name}`, name, roles: ['processor'], url: `${env.APP_URL}/invitation/${token}`, expiresAt, zone: shop.zone, statedAt: ctx.now } });
-  await recordAudit(ctx, { action: 'processor.invite', entity: 'processor', entityId: processorId, after: { email, invitationId } });
+  const invitationId = await atDoorOf(ctx.tx, ctx.tenant, () =>
+    replaceInvitation(ctx, { processorId, name, email, token, expiresAt }),
+  );
+  await queueMail(ctx, {
+    template: 'invitation',
+    to: email,
+    props: {
+      organisation: name,
+      inviter: `${ctx.actor.name} of ${shop.name}`,
+      name,
+      roles: ['processor'],
+      url: `${env.APP_URL}/invitation/${token}`,
+      expiresAt,
+      zone: shop.zone,
+      statedAt: ctx.now,
+    },
+  });
+  await recordAudit(ctx, {
+    action: 'processor.invite',
+    entity: 'processor',
+    entityId: processorId,
+    after: { email, invitationId },
+  });
   return { email };
 }
 
@@ -45,15 +68,45 @@ interface NewInvitation {
 }
 
 /** One invitation at a time waits at a desk, whichever shop sent it. */
-async function replaceInvitation(ctx: Ctx, { processorId, name, email, token, expiresAt }: NewInvitation): Promise<string> {
+async function replaceInvitation(
+  ctx: Ctx,
+  { processorId, name, email, token, expiresAt }: NewInvitation,
+): Promise<string> {
   const [member] = await ctx.tx
     .select({ id: memberships.id })
     .from(memberships)
     .innerJoin(users, eq(users.id, memberships.userId))
-    .where(and(eq(memberships.processorId, processorId), eq(memberships.active, true), eq(users.email, email)));
-  if (member) throw new AppError('conflict', `${email} has an account already. It signs in with it, or opens the link in your dispatch mail.`);
-  await ctx.tx.update(invitations).set({ withdrawnAt: ctx.now }).where(and(eq(invitations.processorId, processorId), isNull(invitations.acceptedAt), isNull(invitations.withdrawnAt)));
+    .where(
+      and(eq(memberships.processorId, processorId), eq(memberships.active, true), eq(users.email, email)),
+    );
+  if (member)
+    throw new AppError(
+      'conflict',
+      `${email} has an account already. It signs in with it, or opens the link in your dispatch mail.`,
+    );
+  await ctx.tx
+    .update(invitations)
+    .set({ withdrawnAt: ctx.now })
+    .where(
+      and(
+        eq(invitations.processorId, processorId),
+        isNull(invitations.acceptedAt),
+        isNull(invitations.withdrawnAt),
+      ),
+    );
   const id = newId();
-  await ctx.tx.insert(invitations).values({ id, processorId, email, name, roles: ['processor'], tokenHash: hashToken(token), invitedBy: personOf(ctx.actor), expiresAt, createdAt: ctx.now });
+  await ctx.tx
+    .insert(invitations)
+    .values({
+      id,
+      processorId,
+      email,
+      name,
+      roles: ['processor'],
+      tokenHash: hashToken(token),
+      invitedBy: personOf(ctx.actor),
+      expiresAt,
+      createdAt: ctx.now,
+    });
   return id;
 }

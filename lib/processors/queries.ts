@@ -9,10 +9,17 @@ import { calendarDay } from '@/lib/day-words';
 import { AppError, notFound } from '@/lib/errors';
 import type { Process } from '@/lib/trade/process';
 
-import type { APPROVAL_STATES, getProcessor as getDeclaration, listProcessors as listDeclaration } from './contract';
+import type {
+  APPROVAL_STATES,
+  getProcessor as getDeclaration,
+  listProcessors as listDeclaration,
+} from './contract';
 
 /** By name; two of one name follow their ids, so the page's key is both. */
-export async function listProcessors(ctx: Ctx, { after, limit, active }: z.output<(typeof listDeclaration)['input']>) {
+export async function listProcessors(
+  ctx: Ctx,
+  { after, limit, active }: z.output<(typeof listDeclaration)['input']>,
+) {
   authorize(ctx, 'processor.read');
   const today = await todayOf(ctx);
   const holding = sql`from approvals a where a.processor_id = ${processors.id} and a.withdrawn_at is null and ${today}::date between a.valid_from and a.valid_to`;
@@ -23,14 +30,21 @@ export async function listProcessors(ctx: Ctx, { after, limit, active }: z.outpu
       contactName: shopProcessors.contactName,
       contactEmail: shopProcessors.contactEmail,
       active: shopProcessors.active,
-      processes: sql<Process[]>`coalesce((select array_agg(distinct p.word order by p.word) from (select unnest(a.processes) as word ${holding}) p), '{}')`,
+      processes: sql<
+        Process[]
+      >`coalesce((select array_agg(distinct p.word order by p.word) from (select unnest(a.processes) as word ${holding}) p), '{}')`,
       approvalEndsOn: sql<string | null>`(select min(a.valid_to)::text ${holding})`,
       openBatches: sql<number>`(select count(*)::int from batches b where b.processor_id = ${processors.id} and b.stage not in ('stocked', 'cancelled'))`,
       piecesOut: sql<number>`(select coalesce(sum(b.pieces - b.pieces_back), 0)::int from batches b where b.processor_id = ${processors.id} and b.stage in ('dispatched', 'at_processor', 'held'))`,
     })
     .from(shopProcessors)
     .innerJoin(processors, eq(processors.id, shopProcessors.processorId))
-    .where(and(after === undefined ? undefined : beyond(after), active === undefined ? undefined : eq(shopProcessors.active, active === 'true')))
+    .where(
+      and(
+        after === undefined ? undefined : beyond(after),
+        active === undefined ? undefined : eq(shopProcessors.active, active === 'true'),
+      ),
+    )
     .orderBy(asc(sql`lower(${processors.name})`), asc(processors.id))
     .limit(limit + 1);
   return toPage(rows, limit, (row) => `${row.processorId}${row.name.toLowerCase()}`);
@@ -40,7 +54,10 @@ const ID_LENGTH = 36;
 
 function beyond(after: string): SQL {
   const id = after.slice(0, ID_LENGTH);
-  if (!/^[0-9a-f-]{36}$/.test(id)) throw new AppError('bad_input', 'This is not a place in the list.', { fields: [{ field: 'after', message: 'Use what `next` said.' }] });
+  if (!/^[0-9a-f-]{36}$/.test(id))
+    throw new AppError('bad_input', 'This is not a place in the list.', {
+      fields: [{ field: 'after', message: 'Use what `next` said.' }],
+    });
   return sql`(lower(${processors.name}), ${processors.id}) > (${after.slice(ID_LENGTH)}, ${id}::uuid)`;
 }
 
@@ -67,15 +84,34 @@ export async function getProcessor(ctx: Ctx, { processorId }: z.output<(typeof g
   if (!found) throw notFound('processor');
   const today = await todayOf(ctx);
   const all = await ctx.tx
-    .select({ id: approvals.id, reference: approvals.reference, processes: approvals.processes, specifications: approvals.specifications, validFrom: approvals.validFrom, validTo: approvals.validTo, withdrawnAt: approvals.withdrawnAt })
+    .select({
+      id: approvals.id,
+      reference: approvals.reference,
+      processes: approvals.processes,
+      specifications: approvals.specifications,
+      validFrom: approvals.validFrom,
+      validTo: approvals.validTo,
+      withdrawnAt: approvals.withdrawnAt,
+    })
     .from(approvals)
     .where(eq(approvals.processorId, processorId))
     .orderBy(desc(approvals.validTo), desc(approvals.id));
-  return { ...found, today, approvals: all.map((approval) => ({ ...approval, processes: approval.processes as Process[], state: stateOn(today, approval) })) };
+  return {
+    ...found,
+    today,
+    approvals: all.map((approval) => ({
+      ...approval,
+      processes: approval.processes as Process[],
+      state: stateOn(today, approval),
+    })),
+  };
 }
 
 /** How an approval stands on a day. */
-export function stateOn(day: string, { validFrom, validTo, withdrawnAt }: { validFrom: string; validTo: string; withdrawnAt: Date | null }): (typeof APPROVAL_STATES)[number] {
+export function stateOn(
+  day: string,
+  { validFrom, validTo, withdrawnAt }: { validFrom: string; validTo: string; withdrawnAt: Date | null },
+): (typeof APPROVAL_STATES)[number] {
   if (withdrawnAt !== null) return 'withdrawn';
   if (day < validFrom) return 'begins_later';
   return day > validTo ? 'ended' : 'holds';
@@ -83,6 +119,9 @@ export function stateOn(day: string, { validFrom, validTo, withdrawnAt }: { vali
 
 /** An approval begins and ends with the shop's day, not with the server's. */
 export async function todayOf(ctx: Ctx): Promise<string> {
-  const [shop] = await ctx.tx.select({ zone: shops.zone }).from(shops).where(eq(shops.id, shopOf(ctx)));
+  const [shop] = await ctx.tx
+    .select({ zone: shops.zone })
+    .from(shops)
+    .where(eq(shops.id, shopOf(ctx)));
   return calendarDay(ctx.now, shop?.zone ?? 'UTC');
 }

@@ -10,7 +10,10 @@ import { changedMeanwhile } from '@/lib/errors';
 import type { updateProcessor as declaration } from './contract';
 import { getProcessor } from './queries';
 
-export async function updateProcessor(ctx: Ctx, { processorId, version, ...wanted }: z.output<(typeof declaration)['input']>) {
+export async function updateProcessor(
+  ctx: Ctx,
+  { processorId, version, ...wanted }: z.output<(typeof declaration)['input']>,
+) {
   authorize(ctx, 'processor.edit');
   const { contactName, contactEmail, note, active } = await getProcessor(ctx, { processorId });
   const [changed] = await ctx.tx
@@ -19,6 +22,12 @@ export async function updateProcessor(ctx: Ctx, { processorId, version, ...wante
     .where(and(eq(shopProcessors.processorId, processorId), eq(shopProcessors.version, version)))
     .returning({ version: shopProcessors.version });
   if (!changed) throw changedMeanwhile('processor');
-  await recordAudit(ctx, { action: 'processor.change', entity: 'processor', entityId: processorId, before: { contactName, contactEmail, note, active }, after: wanted });
+  await recordAudit(ctx, {
+    action: 'processor.change',
+    entity: 'processor',
+    entityId: processorId,
+    before: { contactName, contactEmail, note, active },
+    after: wanted,
+  });
   return { version: changed.version };
 }

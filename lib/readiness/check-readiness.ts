@@ -17,7 +17,9 @@ const PATIENCE_MS = 3000;
 export async function checkReadiness(primary: Db, replica: Db): Promise<Readiness> {
   const asked: [string, () => Promise<unknown>][] = [
     ['database', () => primary.execute(sql`select 1`)],
-    ...(replica === primary ? [] : [['replica', () => replica.execute(sql`select 1`)] as [string, () => Promise<unknown>]]),
+    ...(replica === primary
+      ? []
+      : [['replica', () => replica.execute(sql`select 1`)] as [string, () => Promise<unknown>]]),
     ['storage', () => checkStorage()],
     ['mail', () => checkMail()],
     ['queue', () => primary.execute(sql`select version from pgboss.version`)],

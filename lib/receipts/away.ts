@@ -24,7 +24,11 @@ export const awayOf = (line: AwayStanding): number => line.transitOut + line.atP
 export function takenFrom(line: AwayStanding, pieces: number): Taken[] {
   const taken: Taken[] = [];
   let left = pieces;
-  for (const [place, there] of [['transit_back', line.transitBack], ['at_processor', line.atProcessor], ['transit_out', line.transitOut]] as const) {
+  for (const [place, there] of [
+    ['transit_back', line.transitBack],
+    ['at_processor', line.atProcessor],
+    ['transit_out', line.transitOut],
+  ] as const) {
     const some = Math.min(left, there);
     if (some > 0) taken.push({ place, pieces: some });
     left -= some;
@@ -34,6 +38,11 @@ export function takenFrom(line: AwayStanding, pieces: number): Taken[] {
 
 /** The line after some of it was taken. */
 export function without(line: AwayStanding, taken: readonly Taken[]): AwayStanding {
-  const sum = (place: AwayPlace) => taken.filter((one) => one.place === place).reduce((all, one) => all + one.pieces, 0);
-  return { transitBack: line.transitBack - sum('transit_back'), atProcessor: line.atProcessor - sum('at_processor'), transitOut: line.transitOut - sum('transit_out') };
+  const sum = (place: AwayPlace) =>
+    taken.filter((one) => one.place === place).reduce((all, one) => all + one.pieces, 0);
+  return {
+    transitBack: line.transitBack - sum('transit_back'),
+    atProcessor: line.atProcessor - sum('at_processor'),
+    transitOut: line.transitOut - sum('transit_out'),
+  };
 }

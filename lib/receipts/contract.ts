@@ -5,7 +5,10 @@ import { Id, Moment } from '@/lib/api/shapes';
 import { STAGES } from '@/lib/batches/stage';
 import { PROCESSES } from '@/lib/trade/process';
 
-const Count = z.int('Enter a whole number of pieces.').min(0, 'Enter 0 or more.').max(1_000_000, 'Enter 1,000,000 or less.');
+const Count = z
+  .int('Enter a whole number of pieces.')
+  .min(0, 'Enter 0 or more.')
+  .max(1_000_000, 'Enter 1,000,000 or less.');
 const Note = z.string().trim().max(500, 'Write 500 characters or less.');
 
 export const ReceivingLine = z.object({
@@ -80,7 +83,10 @@ export const CountIn = z.object({
     )
     .min(1, 'Count at least one line.')
     .max(500),
-  photos: z.array(z.object({ fileId: Id, lineId: Id.nullable().default(null) })).max(40, 'Add 40 photos or less.').default([]),
+  photos: z
+    .array(z.object({ fileId: Id, lineId: Id.nullable().default(null) }))
+    .max(40, 'Add 40 photos or less.')
+    .default([]),
 });
 
 export const countIn = declare({
@@ -91,7 +97,12 @@ export const countIn = declare({
   side: 'shop',
   permission: 'receipt.count',
   input: CountIn,
-  response: z.object({ receiptId: Id, good: z.int(), damaged: z.int(), nonconformances: z.array(z.object({ id: Id, number: z.string() })) }),
+  response: z.object({
+    receiptId: Id,
+    good: z.int(),
+    damaged: z.int(),
+    nonconformances: z.array(z.object({ id: Id, number: z.string() })),
+  }),
 });
 
 export const ReceiptRow = z.object({
@@ -99,7 +110,17 @@ export const ReceiptRow = z.object({
   receivedAt: Moment,
   receivedBy: z.string(),
   note: z.string().nullable(),
-  lines: z.array(z.object({ lineNo: z.int(), partNumber: z.string(), good: z.int(), damaged: z.int(), short: z.int(), over: z.int(), note: z.string().nullable() })),
+  lines: z.array(
+    z.object({
+      lineNo: z.int(),
+      partNumber: z.string(),
+      good: z.int(),
+      damaged: z.int(),
+      short: z.int(),
+      over: z.int(),
+      note: z.string().nullable(),
+    }),
+  ),
   photos: z.array(z.object({ fileId: Id, name: z.string(), lineNo: z.int().nullable() })),
 });
 export type ReceiptRow = z.output<typeof ReceiptRow>;

@@ -29,6 +29,7 @@ export async function lockSentBatch(ctx: Ctx, batchId: string, nothing: string) 
     .for('update');
   if (!batch) throw notFound('batch');
   if (batch.cancelledAt !== null) throw new AppError('conflict', `${batch.number} is cancelled. ${nothing}.`);
-  if (batch.dispatchedAt === null) throw new AppError('conflict', `${batch.number} has not left yet. ${nothing}.`);
+  if (batch.dispatchedAt === null)
+    throw new AppError('conflict', `${batch.number} has not left yet. ${nothing}.`);
   return batch;
 }

@@ -22,9 +22,26 @@ export async function findForReceiving(ctx: Ctx, { text }: { text: string }) {
   const found = { batchId: batches.id, number: batches.number, stage: batches.stage };
   const [batch] =
     scan.kind === 'token'
-      ? await ctx.tx.select(found).from(batches).innerJoin(batchLinks, eq(batchLinks.batchId, batches.id)).where(eq(batchLinks.tokenHash, hashToken(scan.token)))
-      : await ctx.tx.select(found).from(batches).where(scan.kind === 'id' ? eq(batches.id, scan.id) : sql`${batches.number} = ${scan.number} or ${batches.orderNumber} = ${scan.number}`);
-  if (!batch) throw new AppError('not_found', scan.kind === 'number' ? `No batch and no order has the number ${scan.number}.` : 'This code is of no batch of yours.');
+      ? await ctx.tx
+          .select(found)
+          .from(batches)
+          .innerJoin(batchLinks, eq(batchLinks.batchId, batches.id))
+          .where(eq(batchLinks.tokenHash, hashToken(scan.token)))
+      : await ctx.tx
+          .select(found)
+          .from(batches)
+          .where(
+            scan.kind === 'id'
+              ? eq(batches.id, scan.id)
+              : sql`${batches.number} = ${scan.number} or ${batches.orderNumber} = ${scan.number}`,
+          );
+  if (!batch)
+    throw new AppError(
+      'not_found',
+      scan.kind === 'number'
+        ? `No batch and no order has the number ${scan.number}.`
+        : 'This code is of no batch of yours.',
+    );
   return batch;
 }
 
@@ -51,7 +68,10 @@ export async function getReceiving(ctx: Ctx, { batchId }: { batchId: string }) {
   if (!batch) throw notFound('batch');
   const { receipts: count, ...head } = batch;
   const lines = await readLineStanding(ctx, batchId);
-  const awayPieces = await namedAway(ctx, lines.filter((line) => line.serialised).map((line) => line.lineId));
+  const awayPieces = await namedAway(
+    ctx,
+    lines.filter((line) => line.serialised).map((line) => line.lineId),
+  );
   return {
     batch: head,
     receipts: count,
@@ -66,7 +86,9 @@ export async function getReceiving(ctx: Ctx, { batchId }: { batchId: string }) {
       pieces: line.pieces,
       away: awayOf(line),
       shortOpen: line.shortOpen,
-      awayPieces: awayPieces.filter((piece) => piece.lineId === line.lineId).map(({ id, serial }) => ({ id, serial })),
+      awayPieces: awayPieces
+        .filter((piece) => piece.lineId === line.lineId)
+        .map(({ id, serial }) => ({ id, serial })),
     })),
   };
 }
@@ -83,19 +105,40 @@ async function namedAway(ctx: Ctx, lineIds: readonly string[]) {
 /** The receipts of one batch. Few, so they come whole. */
 export async function listReceipts(ctx: Ctx, { batchId }: { batchId: string }) {
   authorize(ctx, 'receipt.read');
-  const [batch] = await ctx.tx.select({ dispatchedAt: batches.dispatchedAt }).from(batches).where(eq(batches.id, batchId));
+  const [batch] = await ctx.tx
+    .select({ dispatchedAt: batches.dispatchedAt })
+    .from(batches)
+    .where(eq(batches.id, batchId));
   if (!batch) throw notFound('batch');
-  const heads = await ctx.tx.select().from(receipts).where(eq(receipts.batchId, batchId)).orderBy(desc(receipts.receivedAt), desc(receipts.id));
+  const heads = await ctx.tx
+    .select()
+    .from(receipts)
+    .where(eq(receipts.batchId, batchId))
+    .orderBy(desc(receipts.receivedAt), desc(receipts.id));
   const standing = await readLineStanding(ctx, batchId);
   const partOf = (lineId: string) => standing.find((line) => line.lineId === lineId)?.partNumber ?? '';
   const counts = await ctx.tx
-    .select({ receiptId: receiptLines.receiptId, lineId: receiptLines.lineId, lineNo: batchLines.lineNo, good: receiptLines.good, damaged: receiptLines.damaged, short: receiptLines.short, over: receiptLines.over, note: receiptLines.note })
+    .select({
+      receiptId: receiptLines.receiptId,
+      lineId: receiptLines.lineId,
+      lineNo: batchLines.lineNo,
+      good: receiptLines.good,
+      damaged: receiptLines.damaged,
+      short: receiptLines.short,
+      over: receiptLines.over,
+      note: receiptLines.note,
+    })
     .from(receiptLines)
     .innerJoin(batchLines, eq(batchLines.id, receiptLines.lineId))
     .where(eq(batchLines.batchId, batchId))
     .orderBy(asc(batchLines.lineNo));
   const photos = await ctx.tx
-    .select({ receiptId: receiptPhotos.receiptId, fileId: receiptPhotos.fileId, name: files.name, lineNo: batchLines.lineNo })
+    .select({
+      receiptId: receiptPhotos.receiptId,
+      fileId: receiptPhotos.fileId,
+      name: files.name,
+      lineNo: batchLines.lineNo,
+    })
     .from(receiptPhotos)
     .innerJoin(receipts, eq(receipts.id, receiptPhotos.receiptId))
     .innerJoin(files, eq(files.id, receiptPhotos.fileId))
@@ -109,8 +152,12 @@ export async function listReceipts(ctx: Ctx, { batchId }: { batchId: string }) {
       receivedAt,
       receivedBy,
       note,
-      lines: counts.filter((one) => one.receiptId === id).map(({ receiptId: _receipt, lineId, ...one }) => ({ ...one, partNumber: partOf(lineId) })),
-      photos: photos.filter((one) => one.receiptId === id).map(({ fileId, name, lineNo }) => ({ fileId, name, lineNo })),
+      lines: counts
+        .filter((one) => one.receiptId === id)
+        .map(({ receiptId: _receipt, lineId, ...one }) => ({ ...one, partNumber: partOf(lineId) })),
+      photos: photos
+        .filter((one) => one.receiptId === id)
+        .map(({ fileId, name, lineNo }) => ({ fileId, name, lineNo })),
     })),
   };
 }

@@ -1,5 +1,6 @@
 /** What a scanner, or a person in its place, gave: a batch's or order's number, a batch's id, or the code of a traveller. */
-export type Scan = { kind: 'number'; number: string } | { kind: 'id'; id: string } | { kind: 'token'; token: string };
+export type Scan =
+  { kind: 'number'; number: string } | { kind: 'id'; id: string } | { kind: 'token'; token: string };
 
 const UUID = /[0-9a-f]{8}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{12}/i;
 

@@ -8,7 +8,8 @@ const escaped = (text: string): string => text.replace(/[\\%_]/g, (sign) => `\\$
 export function patternsOf(text: string): string[] {
   const typed = text.trim();
   const patterns = [typed, typed.toUpperCase()];
-  if (/^\d+$/.test(typed)) patterns.push(...['B-', 'L-', 'NC-'].map((prefix) => prefix + typed.padStart(4, '0')));
+  if (/^\d+$/.test(typed))
+    patterns.push(...['B-', 'L-', 'NC-'].map((prefix) => prefix + typed.padStart(4, '0')));
   return [...new Set(patterns)].map((pattern) => `${escaped(pattern)}%`);
 }
 

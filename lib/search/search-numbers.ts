@@ -44,7 +44,11 @@ const byTraveller = (token: string): SQL => sql`
   where k.token_hash = ${hashToken(token)}`;
 
 function everywhere(text: string): SQL {
-  const like = (column: SQL): SQL => sql.join(patternsOf(text).map((pattern) => sql`${column} like ${pattern}`), sql` or `);
+  const like = (column: SQL): SQL =>
+    sql.join(
+      patternsOf(text).map((pattern) => sql`${column} like ${pattern}`),
+      sql` or `,
+    );
   return sql`
     (select 'Batch' as kind, b.number, p.name || ', ' || replace(b.stage::text, '_', ' ') as says, '/batches/' || b.id as href
       from batches b join processors p on p.id = b.processor_id where ${like(sql`b.number`)} order by b.number limit ${EACH})

@@ -8,7 +8,13 @@ import { ROLES } from '@/lib/auth/roles';
 export const Me = z.object({
   name: z.string(),
   roles: z.array(z.enum(ROLES)),
-  organisation: z.object({ id: Id, kind: z.enum(['shop', 'processor']), name: z.string(), zone: z.string(), currency: z.string().nullable() }),
+  organisation: z.object({
+    id: Id,
+    kind: z.enum(['shop', 'processor']),
+    name: z.string(),
+    zone: z.string(),
+    currency: z.string().nullable(),
+  }),
   units: z.enum(['inch', 'metric']),
   singleKeys: z.boolean(),
   /** Set for a link: the one batch it reaches. */

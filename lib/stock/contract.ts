@@ -30,7 +30,9 @@ export const addLocation = declare({
   summary: 'Name a place in the stores',
   side: 'shop',
   permission: 'stock.release',
-  input: z.object({ name: z.string().trim().min(1, 'Give the place a name.').max(60, 'Write 60 characters or less.') }),
+  input: z.object({
+    name: z.string().trim().min(1, 'Give the place a name.').max(60, 'Write 60 characters or less.'),
+  }),
   response: z.object({ id: Id }),
 });
 
@@ -68,7 +70,9 @@ export const StockSpot = z.object({
   pieces: z.int(),
   named: Named,
   /** Open assemblies that need the part, earliest need first, and how many more each of them takes. */
-  needs: z.array(z.object({ assemblyId: Id, name: z.string(), neededOn: z.string().nullable(), open: z.int() })),
+  needs: z.array(
+    z.object({ assemblyId: Id, name: z.string(), neededOn: z.string().nullable(), open: z.int() }),
+  ),
 });
 export type StockSpot = z.output<typeof StockSpot>;
 
@@ -97,7 +101,13 @@ export const GateLine = z.object({
   released: z.int(),
   mayPass: z.int(),
   nextProcess: z.enum(PROCESSES).nullable(),
-  missing: z.array(z.object({ reason: z.enum(['nothing_back', 'not_proved', 'on_hold', 'not_paid', 'still_away']), pieces: z.int(), detail: z.array(z.string()) })),
+  missing: z.array(
+    z.object({
+      reason: z.enum(['nothing_back', 'not_proved', 'on_hold', 'not_paid', 'still_away']),
+      pieces: z.int(),
+      detail: z.array(z.string()),
+    }),
+  ),
   /** What the reasons are about: batches whose money is open, nonconformances that hold pieces. */
   unpaid: z.array(Numbered),
   holds: z.array(Numbered),
@@ -119,7 +129,16 @@ export const getGate = declare({
   side: 'shop',
   permission: 'stock.read',
   input: z.object({ batchId: Id }),
-  response: z.object({ batchId: Id, number: z.string(), stage: z.enum(STAGES), processor: z.string(), dispatched: z.boolean(), lines: z.array(GateLine), locations: z.array(Location), assemblies: z.array(Readiness) }),
+  response: z.object({
+    batchId: Id,
+    number: z.string(),
+    stage: z.enum(STAGES),
+    processor: z.string(),
+    dispatched: z.boolean(),
+    lines: z.array(GateLine),
+    locations: z.array(Location),
+    assemblies: z.array(Readiness),
+  }),
 });
 
 export const releasePieces = declare({
@@ -137,7 +156,10 @@ export const releasePieces = declare({
       .max(500),
   }),
   /** `assemblies`: those that came nearer by it, with how they stand now. */
-  response: z.object({ releases: z.array(z.object({ id: Id, lineId: Id, pieces: z.int() })), assemblies: z.array(Readiness) }),
+  response: z.object({
+    releases: z.array(z.object({ id: Id, lineId: Id, pieces: z.int() })),
+    assemblies: z.array(Readiness),
+  }),
 });
 
 export const Release = z.object({

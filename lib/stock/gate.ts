@@ -34,7 +34,8 @@ export function releaseGate(facts: GateFacts): GateVerdict {
   const proved = Math.max(0, Math.min(facts.inQuarantine, facts.proved));
   const needsMoney = !facts.hasNextStep && !facts.paid;
   const missing: GateVerdict['missing'] = [];
-  const add = (reason: Missing, pieces: number, detail: readonly string[] = []) => missing.push({ reason, pieces, detail });
+  const add = (reason: Missing, pieces: number, detail: readonly string[] = []) =>
+    missing.push({ reason, pieces, detail });
 
   if (facts.away > 0) add('still_away', facts.away);
   if (facts.inQuarantine === 0 && facts.onHold === 0 && facts.away > 0) add('nothing_back', facts.away);

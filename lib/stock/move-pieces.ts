@@ -10,8 +10,25 @@ import type { Place } from './places';
 
 /** Why pieces moved. `made` alone brings pieces into being. */
 export type MoveReason =
-  | 'made' | 'packed' | 'unpacked' | 'dispatched' | 'cancelled' | 'acknowledged' | 'shipped' | 'received' | 'held'
-  | 'released' | 'accepted' | 'scrapped' | 'lost' | 'fitted' | 'unfitted' | 'moved' | 'returned_to_processor' | 'reprocess' | 'found';
+  | 'made'
+  | 'packed'
+  | 'unpacked'
+  | 'dispatched'
+  | 'cancelled'
+  | 'acknowledged'
+  | 'shipped'
+  | 'received'
+  | 'held'
+  | 'released'
+  | 'accepted'
+  | 'scrapped'
+  | 'lost'
+  | 'fitted'
+  | 'unfitted'
+  | 'moved'
+  | 'returned_to_processor'
+  | 'reprocess'
+  | 'found';
 
 export interface Spot {
   place: Place;
@@ -38,8 +55,12 @@ export interface Move {
  * @throws AppError `conflict` when fewer pieces are at `from` than the move takes, naming how it stands.
  */
 export async function movePieces(ctx: Ctx, move: Move): Promise<void> {
-  if (!Number.isInteger(move.pieces) || move.pieces <= 0) throw new AppError('bad_input', 'Enter a whole number of pieces, 1 or more.');
-  const [lot] = await ctx.tx.select({ number: lots.number, serialised: lots.serialised }).from(lots).where(eq(lots.id, move.lotId));
+  if (!Number.isInteger(move.pieces) || move.pieces <= 0)
+    throw new AppError('bad_input', 'Enter a whole number of pieces, 1 or more.');
+  const [lot] = await ctx.tx
+    .select({ number: lots.number, serialised: lots.serialised })
+    .from(lots)
+    .where(eq(lots.id, move.lotId));
   if (!lot) throw new AppError('not_found', 'This lot belongs to another shop, or it does not exist.');
   const pieceIds = lot.serialised ? (move.pieceIds ?? (await firstBySerial(ctx, move))) : undefined;
 
@@ -60,7 +81,12 @@ export async function movePieces(ctx: Ctx, move: Move): Promise<void> {
       movedAt: ctx.now,
     });
   } catch (error) {
-    throw isShortage(error) ? new AppError('conflict', `Lot ${lot.number} has fewer than ${move.pieces} pieces there now. Look again, then enter what there is.`) : error;
+    throw isShortage(error)
+      ? new AppError(
+          'conflict',
+          `Lot ${lot.number} has fewer than ${move.pieces} pieces there now. Look again, then enter what there is.`,
+        )
+      : error;
   }
 }
 
@@ -69,10 +95,17 @@ async function firstBySerial(ctx: Ctx, move: Move): Promise<string[]> {
   const found = await ctx.tx
     .select({ id: namedPieces.id })
     .from(namedPieces)
-    .where(and(eq(namedPieces.lotId, move.lotId), eq(namedPieces.place, move.from.place), eq(namedPieces.holderId, move.from.holderId)))
+    .where(
+      and(
+        eq(namedPieces.lotId, move.lotId),
+        eq(namedPieces.place, move.from.place),
+        eq(namedPieces.holderId, move.from.holderId),
+      ),
+    )
     .orderBy(namedPieces.serial)
     .limit(move.pieces);
-  if (found.length < move.pieces) throw new AppError('conflict', `Only ${found.length} of the named pieces are there now.`);
+  if (found.length < move.pieces)
+    throw new AppError('conflict', `Only ${found.length} of the named pieces are there now.`);
   return found.map((piece) => piece.id);
 }
 

@@ -19,9 +19,24 @@ export async function moveStock(ctx: Ctx, input: z.output<(typeof declaration)['
   const [lot] = await ctx.tx.select({ number: lots.number }).from(lots).where(eq(lots.id, input.lotId));
   if (!lot) throw notFound('lot');
   refuseNameCount(input);
-  if (input.fromLocationId === input.toLocationId) throw new AppError('bad_input', `They are in ${to.name} already.`, { fields: [{ field: 'toLocationId', message: 'They are there already. Choose another place.' }] });
+  if (input.fromLocationId === input.toLocationId)
+    throw new AppError('bad_input', `They are in ${to.name} already.`, {
+      fields: [{ field: 'toLocationId', message: 'They are there already. Choose another place.' }],
+    });
 
-  await movePieces(ctx, { lotId: input.lotId, pieces: input.pieces, from: { place: 'stock', holderId: input.fromLocationId }, to: { place: 'stock', holderId: input.toLocationId }, reason: 'moved', ...byName(input.pieceIds) });
-  await recordAudit(ctx, { action: 'lot.move', entity: 'lot', entityId: input.lotId, after: { lot: lot.number, to: to.name, pieces: input.pieces } });
+  await movePieces(ctx, {
+    lotId: input.lotId,
+    pieces: input.pieces,
+    from: { place: 'stock', holderId: input.fromLocationId },
+    to: { place: 'stock', holderId: input.toLocationId },
+    reason: 'moved',
+    ...byName(input.pieceIds),
+  });
+  await recordAudit(ctx, {
+    action: 'lot.move',
+    entity: 'lot',
+    entityId: input.lotId,
+    after: { lot: lot.number, to: to.name, pieces: input.pieces },
+  });
   return { done: true as const };
 }

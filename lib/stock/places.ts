@@ -15,4 +15,8 @@ export const PLACES = [
 export type Place = (typeof PLACES)[number];
 
 /** Places in which a piece is out of the shop's hands. */
-export const AWAY_PLACES = ['transit_out', 'at_processor', 'transit_back'] as const satisfies readonly Place[];
+export const AWAY_PLACES = [
+  'transit_out',
+  'at_processor',
+  'transit_back',
+] as const satisfies readonly Place[];

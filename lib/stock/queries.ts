@@ -10,7 +10,14 @@ import type { Ctx } from '@/lib/auth/context';
 import { notFound } from '@/lib/errors';
 import { contains, patternsOf } from '@/lib/search/patterns';
 
-import type { GateLine, listStock as stockDeclaration, Location, Release, StockRow, StockSpot } from './contract';
+import type {
+  GateLine,
+  listStock as stockDeclaration,
+  Location,
+  Release,
+  StockRow,
+  StockSpot,
+} from './contract';
 import { readGate } from './read-gate';
 
 type Row<T> = T & Record<string, unknown>;
@@ -29,7 +36,10 @@ async function readLocations(ctx: Ctx): Promise<Location[]> {
 }
 
 /** By part, lot and place; the key of a page is those three, so it does not move when pieces do. */
-export async function listStock(ctx: Ctx, { after, limit, locationId, text }: z.output<(typeof stockDeclaration)['input']>) {
+export async function listStock(
+  ctx: Ctx,
+  { after, limit, locationId, text }: z.output<(typeof stockDeclaration)['input']>,
+) {
   authorize(ctx, 'stock.read');
   const from = after?.split('|') ?? [];
   const { rows } = await ctx.tx.execute<Row<StockRow>>(sql`
@@ -45,10 +55,20 @@ export async function listStock(ctx: Ctx, { after, limit, locationId, text }: z.
 }
 
 const likeText = (text: string) =>
-  sql`and (a.name ilike ${contains(text)} or ${sql.join(patternsOf(text).flatMap((pattern) => [sql`a.number like ${pattern}`, sql`o.number like ${pattern}`, sql`o.heat like ${pattern}`]), sql` or `)})`;
+  sql`and (a.name ilike ${contains(text)} or ${sql.join(
+    patternsOf(text).flatMap((pattern) => [
+      sql`a.number like ${pattern}`,
+      sql`o.number like ${pattern}`,
+      sql`o.heat like ${pattern}`,
+    ]),
+    sql` or `,
+  )})`;
 
 /** What may be done with pieces of one lot in one place. */
-export async function getStockSpot(ctx: Ctx, { lotId, locationId }: { lotId: string; locationId: string }): Promise<StockSpot> {
+export async function getStockSpot(
+  ctx: Ctx,
+  { lotId, locationId }: { lotId: string; locationId: string },
+): Promise<StockSpot> {
   authorize(ctx, 'stock.read');
   const { rows } = await ctx.tx.execute<{ part: string; pieces: number; named: StockSpot['named'] }>(sql`
     select a.number as part, coalesce((select b.pieces from balances b where b.lot_id = o.id and b.place = 'stock' and b.holder_id = ${locationId}), 0) as pieces,
@@ -56,38 +76,65 @@ export async function getStockSpot(ctx: Ctx, { lotId, locationId }: { lotId: str
     from lots o join parts a on a.id = o.part_id where o.id = ${lotId}`);
   const [spot] = rows;
   if (!spot) throw notFound('lot');
-  const needs = (await readNeeds(ctx)).filter((need) => need.partNumber === spot.part && need.fitted < need.pieces);
-  return { pieces: spot.pieces, named: spot.named, needs: needs.map(({ assemblyId, name, neededOn, pieces, fitted }) => ({ assemblyId, name, neededOn, open: pieces - fitted })) };
+  const needs = (await readNeeds(ctx)).filter(
+    (need) => need.partNumber === spot.part && need.fitted < need.pieces,
+  );
+  return {
+    pieces: spot.pieces,
+    named: spot.named,
+    needs: needs.map(({ assemblyId, name, neededOn, pieces, fitted }) => ({
+      assemblyId,
+      name,
+      neededOn,
+      open: pieces - fitted,
+    })),
+  };
 }
 
 export async function getGate(ctx: Ctx, { batchId }: { batchId: string }) {
   authorize(ctx, 'stock.read');
   const [batch] = await ctx.tx
-    .select({ batchId: batches.id, number: batches.number, stage: batches.stage, processor: processors.name, dispatchedAt: batches.dispatchedAt })
+    .select({
+      batchId: batches.id,
+      number: batches.number,
+      stage: batches.stage,
+      processor: processors.name,
+      dispatchedAt: batches.dispatchedAt,
+    })
     .from(batches)
     .innerJoin(processors, eq(processors.id, batches.processorId))
     .where(eq(batches.id, batchId));
   if (!batch) throw notFound('batch');
   const beside = await readBesideLines(ctx, batchId);
-  const lines = (await readGate(ctx, batchId)).map(({ line, nextStep, mayPass, missing, unpaid }): GateLine => ({
-    lineId: line.lineId,
-    lineNo: line.lineNo,
-    lotId: line.lotId,
-    lotNumber: line.lotNumber,
-    partNumber: line.partNumber,
-    partRevision: line.partRevision,
-    partName: line.partName,
-    pieces: line.pieces,
-    released: line.released,
-    mayPass,
-    nextProcess: nextStep?.process ?? null,
-    missing: missing.map((one) => ({ ...one, detail: [...one.detail] })),
-    unpaid,
-    ...(beside.get(line.lineId) ?? { holds: [], named: [], usualLocationId: null }),
-  }));
-  const assemblies = (await readReadiness(ctx)).filter((one) => one.batches.some((wait) => wait.id === batchId));
+  const lines = (await readGate(ctx, batchId)).map(
+    ({ line, nextStep, mayPass, missing, unpaid }): GateLine => ({
+      lineId: line.lineId,
+      lineNo: line.lineNo,
+      lotId: line.lotId,
+      lotNumber: line.lotNumber,
+      partNumber: line.partNumber,
+      partRevision: line.partRevision,
+      partName: line.partName,
+      pieces: line.pieces,
+      released: line.released,
+      mayPass,
+      nextProcess: nextStep?.process ?? null,
+      missing: missing.map((one) => ({ ...one, detail: [...one.detail] })),
+      unpaid,
+      ...(beside.get(line.lineId) ?? { holds: [], named: [], usualLocationId: null }),
+    }),
+  );
+  const assemblies = (await readReadiness(ctx)).filter((one) =>
+    one.batches.some((wait) => wait.id === batchId),
+  );
   const { dispatchedAt, ...head } = batch;
-  return { ...head, dispatched: dispatchedAt !== null, lines, locations: await readLocations(ctx), assemblies: assemblies.map(({ id, name, ready, needed }) => ({ id, name, ready, needed })) };
+  return {
+    ...head,
+    dispatched: dispatchedAt !== null,
+    lines,
+    locations: await readLocations(ctx),
+    assemblies: assemblies.map(({ id, name, ready, needed }) => ({ id, name, ready, needed })),
+  };
 }
 
 type BesideLine = Pick<GateLine, 'holds' | 'named' | 'usualLocationId'>;

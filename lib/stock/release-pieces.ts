@@ -41,17 +41,29 @@ export async function releasePieces(ctx: Ctx, { batchId, lines }: Input) {
     if (!found) throw new AppError('not_found', 'This line is not of this batch.');
     released.push(await releaseLine(ctx, batchId, found, line));
   }
-  await recordAudit(ctx, { action: 'batch.release', entity: 'batch', entityId: batchId, after: { number: batch.number, lines } });
+  await recordAudit(ctx, {
+    action: 'batch.release',
+    entity: 'batch',
+    entityId: batchId,
+    after: { number: batch.number, lines },
+  });
   await refreshStanding(ctx, batchId);
   return { releases: released, assemblies: nearer(before, await readReadiness(ctx)) };
 }
 
 /** Assemblies that have more pieces ready than before. */
 function nearer(before: Awaited<ReturnType<typeof readReadiness>>, after: typeof before) {
-  return after.filter((one) => one.ready > (before.find((was) => was.id === one.id)?.ready ?? 0)).map(({ id, name, ready, needed }) => ({ id, name, ready, needed }));
+  return after
+    .filter((one) => one.ready > (before.find((was) => was.id === one.id)?.ready ?? 0))
+    .map(({ id, name, ready, needed }) => ({ id, name, ready, needed }));
 }
 
-async function releaseLine(ctx: Ctx, batchId: string, { line, nextStep }: GateLine, { pieces, locationId, pieceIds }: Input['lines'][number]) {
+async function releaseLine(
+  ctx: Ctx,
+  batchId: string,
+  { line, nextStep }: GateLine,
+  { pieces, locationId, pieceIds }: Input['lines'][number],
+) {
   refuseNameCount({ pieces, pieceIds });
   const id = newId();
   await ctx.tx.insert(releases).values({
@@ -69,7 +81,9 @@ async function releaseLine(ctx: Ctx, batchId: string, { line, nextStep }: GateLi
     lotId: line.lotId,
     pieces,
     from: { place: 'quarantine', holderId: line.lineId },
-    to: nextStep ? { place: 'making', holderId: nextStep.id } : { place: 'stock', holderId: locationId ?? '' },
+    to: nextStep
+      ? { place: 'making', holderId: nextStep.id }
+      : { place: 'stock', holderId: locationId ?? '' },
     reason: 'released',
     batchLineId: line.lineId,
     ...byName(pieceIds),
@@ -77,13 +91,30 @@ async function releaseLine(ctx: Ctx, batchId: string, { line, nextStep }: GateLi
   return { id, lineId: line.lineId, pieces };
 }
 
-function faultsOf(lines: Input['lines'], gate: readonly GateLine[], openPlaces: ReadonlySet<string>): FieldError[] {
+function faultsOf(
+  lines: Input['lines'],
+  gate: readonly GateLine[],
+  openPlaces: ReadonlySet<string>,
+): FieldError[] {
   return lines.flatMap(({ lineId, pieces, locationId }, at): FieldError[] => {
     const found = gate.find((one) => one.line.lineId === lineId);
-    if (lines.findIndex((other) => other.lineId === lineId) < at) return [{ field: `lines.${at}.lineId`, message: 'This line is named twice.' }];
+    if (lines.findIndex((other) => other.lineId === lineId) < at)
+      return [{ field: `lines.${at}.lineId`, message: 'This line is named twice.' }];
     if (!found) return [{ field: `lines.${at}.lineId`, message: 'This line is not of this batch.' }];
-    if (pieces > found.mayPass) return [{ field: `lines.${at}.pieces`, message: `Line ${found.line.lineNo}: ${found.mayPass} may be released now, not ${pieces}.` }];
-    if (!found.nextStep && (locationId === null || !openPlaces.has(locationId))) return [{ field: `lines.${at}.locationId`, message: `Line ${found.line.lineNo}: choose the place it goes to.` }];
+    if (pieces > found.mayPass)
+      return [
+        {
+          field: `lines.${at}.pieces`,
+          message: `Line ${found.line.lineNo}: ${found.mayPass} may be released now, not ${pieces}.`,
+        },
+      ];
+    if (!found.nextStep && (locationId === null || !openPlaces.has(locationId)))
+      return [
+        {
+          field: `lines.${at}.locationId`,
+          message: `Line ${found.line.lineNo}: choose the place it goes to.`,
+        },
+      ];
     return [];
   });
 }

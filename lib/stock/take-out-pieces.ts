@@ -21,15 +21,36 @@ import { byName, refuseNameCount } from './refuse-name-count';
  */
 export async function takeOutPieces(ctx: Ctx, input: z.output<(typeof declaration)['input']>) {
   authorize(ctx, 'stock.fit');
-  const [assembly] = await ctx.tx.select({ name: assemblies.name, closedAt: assemblies.closedAt }).from(assemblies).where(eq(assemblies.id, input.assemblyId)).for('update');
-  const [lot] = await ctx.tx.select({ number: lots.number, partNumber: parts.number }).from(lots).innerJoin(parts, eq(parts.id, lots.partId)).where(eq(lots.id, input.lotId));
+  const [assembly] = await ctx.tx
+    .select({ name: assemblies.name, closedAt: assemblies.closedAt })
+    .from(assemblies)
+    .where(eq(assemblies.id, input.assemblyId))
+    .for('update');
+  const [lot] = await ctx.tx
+    .select({ number: lots.number, partNumber: parts.number })
+    .from(lots)
+    .innerJoin(parts, eq(parts.id, lots.partId))
+    .where(eq(lots.id, input.lotId));
   if (!assembly) throw notFound('assembly');
   if (!lot) throw notFound('lot');
-  if (assembly.closedAt !== null) throw new AppError('conflict', `${assembly.name} is closed. What is fitted stays fitted.`);
+  if (assembly.closedAt !== null)
+    throw new AppError('conflict', `${assembly.name} is closed. What is fitted stays fitted.`);
   refuseNameCount(input);
   const to = await openLocation(ctx, input.locationId);
 
-  await movePieces(ctx, { lotId: input.lotId, pieces: input.pieces, from: { place: 'fitted', holderId: input.assemblyId }, to: { place: 'stock', holderId: input.locationId }, reason: 'unfitted', ...byName(input.pieceIds) });
-  await recordAudit(ctx, { action: 'assembly.take_out', entity: 'assembly', entityId: input.assemblyId, after: { lot: lot.number, part: lot.partNumber, pieces: input.pieces, to: to.name } });
+  await movePieces(ctx, {
+    lotId: input.lotId,
+    pieces: input.pieces,
+    from: { place: 'fitted', holderId: input.assemblyId },
+    to: { place: 'stock', holderId: input.locationId },
+    reason: 'unfitted',
+    ...byName(input.pieceIds),
+  });
+  await recordAudit(ctx, {
+    action: 'assembly.take_out',
+    entity: 'assembly',
+    entityId: input.assemblyId,
+    after: { lot: lot.number, part: lot.partNumber, pieces: input.pieces, to: to.name },
+  });
   return { done: true as const };
 }

@@ -31,7 +31,10 @@ export interface SignedUpload {
 }
 
 /** An address to which a browser may upload exactly what it announced, for ten minutes. Asks nobody, so it works while storage is down. */
-export async function presignUpload(upload: UploadPromise, storage: Storage = ownStorage()): Promise<SignedUpload> {
+export async function presignUpload(
+  upload: UploadPromise,
+  storage: Storage = ownStorage(),
+): Promise<SignedUpload> {
   const { key, mediaType, sizeBytes, sha256, now } = upload;
   const command = new PutObjectCommand({
     Bucket: storage.bucket,
@@ -66,10 +69,19 @@ export interface NewObject {
 }
 
 /** For what the product makes itself (documents, archives). The same key with the same bytes may be put again. */
-export async function putObject({ key, content, mediaType }: NewObject, storage: Storage = ownStorage()): Promise<void> {
+export async function putObject(
+  { key, content, mediaType }: NewObject,
+  storage: Storage = ownStorage(),
+): Promise<void> {
   await reaching(() =>
     storage.client.send(
-      new PutObjectCommand({ Bucket: storage.bucket, Key: key, Body: content, ContentType: mediaType, ContentLength: content.length }),
+      new PutObjectCommand({
+        Bucket: storage.bucket,
+        Key: key,
+        Body: content,
+        ContentType: mediaType,
+        ContentLength: content.length,
+      }),
     ),
   );
 }
@@ -103,7 +115,9 @@ export async function readObject(key: string, storage: Storage = ownStorage()): 
 
 /** What storage says it holds, or null. It repeats the uploader's words about the type: only the bytes prove it. */
 export async function headObject(key: string, storage: Storage = ownStorage()): Promise<StoredObject | null> {
-  const found = await reaching(() => storage.client.send(new HeadObjectCommand({ Bucket: storage.bucket, Key: key })));
+  const found = await reaching(() =>
+    storage.client.send(new HeadObjectCommand({ Bucket: storage.bucket, Key: key })),
+  );
   return found === null ? null : describe(found);
 }
 
@@ -126,12 +140,19 @@ async function reaching<T>(work: () => Promise<T>): Promise<T | null> {
     const isService = error instanceof S3ServiceException;
     if (isService && error.$metadata.httpStatusCode === 404 && error.name !== 'NoSuchBucket') return null;
     // The client's own error carries the whole signed request. It must not get into a log, so only its name goes on.
-    throw new AppError('unavailable', 'The file store does not answer as it should. Nothing is lost; try again in a minute.', {
-      extra: { reason: error instanceof Error ? error.name : 'unknown' },
-    });
+    throw new AppError(
+      'unavailable',
+      'The file store does not answer as it should. Nothing is lost; try again in a minute.',
+      {
+        extra: { reason: error instanceof Error ? error.name : 'unknown' },
+      },
+    );
   }
 }
 
-function describe(found: { ContentLength?: number | undefined; ContentType?: string | undefined }): StoredObject {
+function describe(found: {
+  ContentLength?: number | undefined;
+  ContentType?: string | undefined;
+}): StoredObject {
   return { sizeBytes: found.ContentLength ?? 0, mediaType: found.ContentType ?? 'application/octet-stream' };
 }

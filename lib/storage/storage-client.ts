@@ -15,7 +15,13 @@ export interface Storage {
   bucket: string;
 }
 
-export function makeStorage({ endpoint, region, bucket, accessKeyId, secretAccessKey }: StorageConfig): Storage {
+export function makeStorage({
+  endpoint,
+  region,
+  bucket,
+  accessKeyId,
+  secretAccessKey,
+}: StorageConfig): Storage {
   const client = new S3Client({
     endpoint,
     region,

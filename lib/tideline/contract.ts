@@ -30,7 +30,9 @@ export const TidelineBatch = z.object({
   openQuestion: z.object({ body: z.string(), askedAt: Moment }).nullable(),
   certificatesToProve: z.int(),
   firstCertificateId: Id.nullable(),
-  invoice: z.object({ id: Id, number: z.string().nullable(), entered: z.boolean(), approved: z.boolean() }).nullable(),
+  invoice: z
+    .object({ id: Id, number: z.string().nullable(), entered: z.boolean(), approved: z.boolean() })
+    .nullable(),
   /** The earliest open assembly that needs a part of it, and how many more there are. */
   assembly: z.object({ id: Id, name: z.string(), neededOn: z.string().nullable(), more: z.int() }).nullable(),
 });
@@ -52,7 +54,15 @@ export const AssemblyWait = z.object({
   needed: z.int(),
   /** Fitted already, or in stock and counted for this assembly alone. */
   ready: z.int(),
-  batches: z.array(z.object({ id: Id, number: z.string(), stage: z.enum(STAGES), pieces: z.int(), promisedOn: z.string().nullable() })),
+  batches: z.array(
+    z.object({
+      id: Id,
+      number: z.string(),
+      stage: z.enum(STAGES),
+      pieces: z.int(),
+      promisedOn: z.string().nullable(),
+    }),
+  ),
 });
 export type AssemblyWait = z.output<typeof AssemblyWait>;
 

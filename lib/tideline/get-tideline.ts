@@ -13,7 +13,10 @@ const STAYS_DAYS = 3;
 
 export async function getTideline(ctx: Ctx) {
   authorize(ctx, 'batch.read');
-  const [shop] = await ctx.tx.select({ zone: shops.zone, latenessBasis: shops.latenessBasis }).from(shops).where(eq(shops.id, shopOf(ctx)));
+  const [shop] = await ctx.tx
+    .select({ zone: shops.zone, latenessBasis: shops.latenessBasis })
+    .from(shops)
+    .where(eq(shops.id, shopOf(ctx)));
   if (!shop) throw notFound('shop');
   const batches = await readBatches(ctx, shop.zone);
   const lanes = await readLanes(ctx, [...new Set(batches.map((batch) => batch.processorId))]);
@@ -30,7 +33,8 @@ export async function getTideline(ctx: Ctx) {
 
 /** One statement: every batch with what its tag, its string and its line in the list need. */
 async function readBatches(ctx: Ctx, zone: string): Promise<TidelineBatch[]> {
-  const day = (column: string) => sql.raw(`(${column} at time zone '${zone.replaceAll("'", "''")}')::date::text`);
+  const day = (column: string) =>
+    sql.raw(`(${column} at time zone '${zone.replaceAll("'", "''")}')::date::text`);
   const { rows } = await ctx.tx.execute<TidelineBatch & Record<string, unknown>>(sql`
     select b.id, b.number, b.stage, b.processor_id as "processorId", b.pieces, b.pieces_back as "piecesBack",
       coalesce(line.contents, 'nothing yet') as contents, b.leaves_on::text as "leavesOn", ${day('b.dispatched_at')} as "dispatchedOn",
@@ -82,7 +86,10 @@ async function readBatches(ctx: Ctx, zone: string): Promise<TidelineBatch[]> {
 
 async function readLanes(ctx: Ctx, processorIds: readonly string[]): Promise<TidelineLane[]> {
   if (processorIds.length === 0) return [];
-  const ids = sql.join(processorIds.map((id) => sql`${id}::uuid`), sql`, `);
+  const ids = sql.join(
+    processorIds.map((id) => sql`${id}::uuid`),
+    sql`, `,
+  );
   const { rows } = await ctx.tx.execute<TidelineLane & Record<string, unknown>>(sql`
     select p.id as "processorId", p.name, coalesce(a.processes, '{}') as processes, a.valid_to as "approvedTo"
     from processors p
@@ -96,7 +103,12 @@ async function readLanes(ctx: Ctx, processorIds: readonly string[]): Promise<Tid
 }
 
 async function readStarted(ctx: Ctx) {
-  const { rows } = await ctx.tx.execute<{ parts: number; lots: number; processors: number; batches: number }>(sql`
+  const { rows } = await ctx.tx.execute<{
+    parts: number;
+    lots: number;
+    processors: number;
+    batches: number;
+  }>(sql`
     select (select count(*)::int from (select 1 from parts limit 1) x) as parts, (select count(*)::int from (select 1 from lots limit 1) x) as lots,
       (select count(*)::int from (select 1 from shop_processors limit 1) x) as processors, (select count(*)::int from (select 1 from batches limit 1) x) as batches`);
   return rows[0] ?? { parts: 0, lots: 0, processors: 0, batches: 0 };

@@ -3,15 +3,25 @@ import { differenceInCalendarDays, parseISO } from 'date-fns';
 import type { TidelineBatch } from './contract';
 
 /** Whole days from one calendar day to another; negative where `to` is earlier. */
-export const daysBetween = (from: string, to: string): number => differenceInCalendarDays(parseISO(to), parseISO(from));
+export const daysBetween = (from: string, to: string): number =>
+  differenceInCalendarDays(parseISO(to), parseISO(from));
 
 /**
  * How many days a batch is late today. Late begins on the day after the promised one, and ends when everything is
  * back; whether the first or the latest promise counts is the shop's choice. Without a promise, the day the shop
  * wanted it back does not make it late: nobody promised it.
  */
-export function daysLate(batch: Pick<TidelineBatch, 'stage' | 'promisedOn' | 'firstPromisedOn' | 'lastBackOn' | 'pieces' | 'piecesBack'>, today: string, basis: 'first_promise' | 'latest_promise'): number {
+export function daysLate(
+  batch: Pick<
+    TidelineBatch,
+    'stage' | 'promisedOn' | 'firstPromisedOn' | 'lastBackOn' | 'pieces' | 'piecesBack'
+  >,
+  today: string,
+  basis: 'first_promise' | 'latest_promise',
+): number {
   const promised = basis === 'first_promise' ? batch.firstPromisedOn : batch.promisedOn;
-  const isOut = ['dispatched', 'at_processor'].includes(batch.stage) || (batch.stage === 'held' && batch.piecesBack < batch.pieces);
+  const isOut =
+    ['dispatched', 'at_processor'].includes(batch.stage) ||
+    (batch.stage === 'held' && batch.piecesBack < batch.pieces);
   return promised !== null && isOut ? Math.max(0, daysBetween(promised, today)) : 0;
 }

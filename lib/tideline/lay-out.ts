@@ -53,28 +53,53 @@ export interface PlacedLane {
 
 /** Lays every lane out. Pure: the same batches, day and width give the same drawing. */
 export function layOut(tideline: Tideline, scale: Scale): PlacedLane[] {
-  const lanes = tideline.lanes.map((lane) => ({ lane, tags: placeTags(tideline, scale, tideline.batches.filter((batch) => batch.processorId === lane.processorId)) }));
+  const lanes = tideline.lanes.map((lane) => ({
+    lane,
+    tags: placeTags(
+      tideline,
+      scale,
+      tideline.batches.filter((batch) => batch.processorId === lane.processorId),
+    ),
+  }));
   const rowsInAll = lanes.reduce((sum, { tags }) => sum + rowsOf(tags), 0);
   return lanes.map(({ lane, tags }) => {
     const tooFull = rowsOf(tags) > MOST_ROWS.lane || rowsInAll > MOST_ROWS.all;
-    return { processorId: lane.processorId, ...(tooFull ? thinOut(tags) : { tags, slips: [], moreLate: 0, height: laneHeight(rowsOf(tags) * ROW_PX) }) };
+    return {
+      processorId: lane.processorId,
+      ...(tooFull
+        ? thinOut(tags)
+        : { tags, slips: [], moreLate: 0, height: laneHeight(rowsOf(tags) * ROW_PX) }),
+    };
   });
 }
 
-const rowsOf = (tags: readonly PlacedTag[]): number => tags.reduce((most, tag) => Math.max(most, tag.row + 1), 0);
+const rowsOf = (tags: readonly PlacedTag[]): number =>
+  tags.reduce((most, tag) => Math.max(most, tag.row + 1), 0);
 const laneHeight = (content: number): number => Math.max(SMALLEST_LANE_PX, content + LANE_PADDING_PX);
 
 /** Held first, then late (most first), then undated, then by the day out: the order in which rows are given. */
 function placeTags(tideline: Tideline, scale: Scale, batches: readonly TidelineBatch[]): PlacedTag[] {
   const late = (batch: TidelineBatch) => daysLate(batch, tideline.today, tideline.latenessBasis);
-  const group = (batch: TidelineBatch) => [batch.stage === 'held', late(batch) > 0, isUndated(batch)].findIndex(Boolean) + 1 || 4;
-  const inOrder = [...batches].sort((a, b) => group(a) - group(b) || late(b) - late(a) || startOf(a, tideline.today).localeCompare(startOf(b, tideline.today)) || a.number.localeCompare(b.number));
+  const group = (batch: TidelineBatch) =>
+    [batch.stage === 'held', late(batch) > 0, isUndated(batch)].findIndex(Boolean) + 1 || 4;
+  const inOrder = [...batches].sort(
+    (a, b) =>
+      group(a) - group(b) ||
+      late(b) - late(a) ||
+      startOf(a, tideline.today).localeCompare(startOf(b, tideline.today)) ||
+      a.number.localeCompare(b.number),
+  );
   const tags = inOrder.map((batch) => placeTag(batch, late(batch), tideline, scale));
   const rows = firstFit(tags.map((tag) => ({ from: tag.x, to: endOf(tag, scale) + 12 })));
   return tags.map((tag, at) => ({ ...tag, row: rows[at] ?? 0 }));
 }
 
-function placeTag(batch: TidelineBatch, lateDays: number, tideline: Tideline, scale: Scale): Omit<PlacedTag, 'row'> {
+function placeTag(
+  batch: TidelineBatch,
+  lateDays: number,
+  tideline: Tideline,
+  scale: Scale,
+): Omit<PlacedTag, 'row'> {
   const start = xOf(scale, startOf(batch, tideline.today));
   const x = Math.max(0, batch.stage === 'building' ? Math.max(start, scale.todayX + 6) : start);
   const end = Math.max(xOf(scale, endDayOf(batch, tideline)) + scale.dayPx, x + 2 * scale.dayPx);
@@ -89,29 +114,41 @@ function placeTag(batch: TidelineBatch, lateDays: number, tideline: Tideline, sc
     fading: isUndated(batch),
     late,
     after: afterWords(batch, tideline),
-    notches: batch.piecesBack > 0 && batch.piecesBack < batch.pieces ? batch.receiptsOn.map((day) => xOf(scale, day) - x).filter((at) => at > 0 && at < width) : [],
-    brokenX: batch.brokenPromises.map((day) => xOf(scale, day) + scale.dayPx - x).filter((at) => at > 0 && at < width),
+    notches:
+      batch.piecesBack > 0 && batch.piecesBack < batch.pieces
+        ? batch.receiptsOn.map((day) => xOf(scale, day) - x).filter((at) => at > 0 && at < width)
+        : [],
+    brokenX: batch.brokenPromises
+      .map((day) => xOf(scale, day) + scale.dayPx - x)
+      .filter((at) => at > 0 && at < width),
   };
   return { ...tag, string: stringOf(batch, endOfBody(tag, scale), scale) };
 }
 
-const isUndated = (batch: TidelineBatch): boolean => ['dispatched', 'at_processor'].includes(batch.stage) && batch.promisedOn === null;
+const isUndated = (batch: TidelineBatch): boolean =>
+  ['dispatched', 'at_processor'].includes(batch.stage) && batch.promisedOn === null;
 
-const startOf = (batch: TidelineBatch, today: string): string => batch.dispatchedOn ?? batch.leavesOn ?? today;
+const startOf = (batch: TidelineBatch, today: string): string =>
+  batch.dispatchedOn ?? batch.leavesOn ?? today;
 
 /** The promised day until everything is back; then the day of the last receipt. */
 function endDayOf(batch: TidelineBatch, { today }: Tideline): string {
   const start = startOf(batch, today);
-  if (batch.stage === 'building') return batch.wantedBackOn ?? addDaysTo(start < today ? today : start, UNDATED_DAYS);
+  if (batch.stage === 'building')
+    return batch.wantedBackOn ?? addDaysTo(start < today ? today : start, UNDATED_DAYS);
   if (batch.piecesBack >= batch.pieces && batch.lastBackOn !== null) return batch.lastBackOn;
   return batch.promisedOn ?? addDaysTo(start, UNDATED_DAYS);
 }
 
 function afterWords(batch: TidelineBatch, { today }: Tideline): string | null {
-  if (batch.stage === 'held' && batch.nonconformance) return `held ${batch.heldSince === null ? 0 : daysBetween(batch.heldSince, today)} d, ${batch.nonconformance.number}`;
-  if (batch.stage === 'building' && batch.leavesOn !== null && batch.leavesOn < today) return 'should have left';
-  if (batch.piecesBack > 0 && batch.piecesBack < batch.pieces) return `${batch.piecesBack} of ${batch.pieces} back`;
-  if (batch.stage === 'returned') return batch.certificatesToProve > 0 ? 'papers in, to prove' : 'no papers yet';
+  if (batch.stage === 'held' && batch.nonconformance)
+    return `held ${batch.heldSince === null ? 0 : daysBetween(batch.heldSince, today)} d, ${batch.nonconformance.number}`;
+  if (batch.stage === 'building' && batch.leavesOn !== null && batch.leavesOn < today)
+    return 'should have left';
+  if (batch.piecesBack > 0 && batch.piecesBack < batch.pieces)
+    return `${batch.piecesBack} of ${batch.pieces} back`;
+  if (batch.stage === 'returned')
+    return batch.certificatesToProve > 0 ? 'papers in, to prove' : 'no papers yet';
   if (batch.stage === 'proved') return batch.invoice ? 'to pay' : 'no invoice yet';
   return batch.stage === 'settled' ? 'paid, to release' : null;
 }
@@ -125,7 +162,10 @@ function showIn(width: number, batch: TidelineBatch): PlacedTag['show'] {
 }
 
 /** Where the tag with its flag and words ends, before any string. */
-function endOfBody(tag: Pick<PlacedTag, 'batch' | 'x' | 'width' | 'late' | 'after' | 'show'>, scale: Scale): number {
+function endOfBody(
+  tag: Pick<PlacedTag, 'batch' | 'x' | 'width' | 'late' | 'after' | 'show'>,
+  scale: Scale,
+): number {
   const body = tag.x + tag.width;
   const outside = outsideWords(tag);
   const words = outside === '' ? 0 : widthOfText(outside, 6.6) + 14;
@@ -134,11 +174,17 @@ function endOfBody(tag: Pick<PlacedTag, 'batch' | 'x' | 'width' | 'late' | 'afte
 
 /** What could not stand in the tag, and what stands after it. */
 export function outsideWords(tag: Pick<PlacedTag, 'batch' | 'show' | 'after'>): string {
-  const inside = { mark: `${tag.batch.number} ${tag.batch.stage.replace('_', ' ')}`, number: tag.batch.stage.replace('_', ' '), word: '', all: '' }[tag.show];
+  const inside = {
+    mark: `${tag.batch.number} ${tag.batch.stage.replace('_', ' ')}`,
+    number: tag.batch.stage.replace('_', ' '),
+    word: '',
+    all: '',
+  }[tag.show];
   return [inside, tag.after ?? ''].filter(Boolean).join(', ');
 }
 
-const endOf = (tag: Omit<PlacedTag, 'row'>, scale: Scale): number => Math.max(endOfBody(tag, scale), tag.string?.endX ?? 0);
+const endOf = (tag: Omit<PlacedTag, 'row'>, scale: Scale): number =>
+  Math.max(endOfBody(tag, scale), tag.string?.endX ?? 0);
 
 /** Held, late and undated batches stay whole, three a lane; the rest become slips. */
 function thinOut(tags: readonly PlacedTag[]): Omit<PlacedLane, 'processorId'> {
@@ -149,8 +195,19 @@ function thinOut(tags: readonly PlacedTag[]): Omit<PlacedLane, 'processorId'> {
   const most = Math.max(0, ...slipRows) + 1;
   const [height, pitch] = most <= 12 ? [7, 9.5] : [3.5, 5.5];
   const top = whole.length * ROW_PX + 4;
-  const slips = rest.map((tag, at) => ({ batch: tag.batch, x: tag.x, width: tag.width, y: top + (slipRows[at] ?? 0) * pitch, height }));
-  return { tags: whole, slips, moreLate: pressing.length - whole.length, height: laneHeight(rest.length > 0 ? top + most * pitch : top) };
+  const slips = rest.map((tag, at) => ({
+    batch: tag.batch,
+    x: tag.x,
+    width: tag.width,
+    y: top + (slipRows[at] ?? 0) * pitch,
+    height,
+  }));
+  return {
+    tags: whole,
+    slips,
+    moreLate: pressing.length - whole.length,
+    height: laneHeight(rest.length > 0 ? top + most * pitch : top),
+  };
 }
 
 /** Gives each span the first row where it touches no other. */

@@ -8,19 +8,36 @@ export interface PhoneGroup {
 }
 
 /** Time runs down on a phone: what is held or late above the line, then by when it comes back. */
-export function phoneGroups(tideline: Tideline): { above: { batch: TidelineBatch; late: number }[]; below: PhoneGroup[] } {
+export function phoneGroups(tideline: Tideline): {
+  above: { batch: TidelineBatch; late: number }[];
+  below: PhoneGroup[];
+} {
   const { today } = tideline;
   const late = (batch: TidelineBatch) => daysLate(batch, today, tideline.latenessBasis);
   const above = tideline.batches
     .filter((batch) => batch.stage === 'held' || late(batch) > 0)
     .map((batch) => ({ batch, late: late(batch) }))
     .sort((a, b) => Number(b.batch.stage === 'held') - Number(a.batch.stage === 'held') || b.late - a.late);
-  const names = ['today', 'tomorrow', 'this week', 'next week', 'later', 'no date yet', 'to leave', 'back, not in stock'] as const;
+  const names = [
+    'today',
+    'tomorrow',
+    'this week',
+    'next week',
+    'later',
+    'no date yet',
+    'to leave',
+    'back, not in stock',
+  ] as const;
   const groups = new Map<string, TidelineBatch[]>(names.map((name) => [name, []]));
   for (const batch of tideline.batches) {
     if (!above.some((one) => one.batch.id === batch.id)) groups.get(groupOf(batch, today))?.push(batch);
   }
-  return { above, below: [...groups].filter(([, batches]) => batches.length > 0).map(([name, batches]) => ({ name, batches: batches.sort(byDay) })) };
+  return {
+    above,
+    below: [...groups]
+      .filter(([, batches]) => batches.length > 0)
+      .map(([name, batches]) => ({ name, batches: batches.sort(byDay) })),
+  };
 }
 
 function groupOf(batch: TidelineBatch, today: string): string {
@@ -34,4 +51,6 @@ function groupOf(batch: TidelineBatch, today: string): string {
   return days <= daysLeftInWeek + 7 ? 'next week' : 'later';
 }
 
-const byDay = (a: TidelineBatch, b: TidelineBatch): number => (a.promisedOn ?? a.leavesOn ?? '').localeCompare(b.promisedOn ?? b.leavesOn ?? '') || a.number.localeCompare(b.number);
+const byDay = (a: TidelineBatch, b: TidelineBatch): number =>
+  (a.promisedOn ?? a.leavesOn ?? '').localeCompare(b.promisedOn ?? b.leavesOn ?? '') ||
+  a.number.localeCompare(b.number);

@@ -24,16 +24,34 @@ export interface Scale {
  *
  * @param dayShare how much of today has passed, 0 to 1.
  */
-export function scaleFor({ widthPx, dayPx, today, dayShare }: { widthPx: number; dayPx: DayWidth; today: string; dayShare: number }): Scale {
+export function scaleFor({
+  widthPx,
+  dayPx,
+  today,
+  dayShare,
+}: {
+  widthPx: number;
+  dayPx: DayWidth;
+  today: string;
+  dayShare: number;
+}): Scale {
   const daysBefore = Math.round((widthPx * TODAY_AT) / dayPx);
   const firstDay = addDaysTo(today, -daysBefore);
-  return { dayPx, widthPx, firstDay, lastDay: addDaysTo(firstDay, Math.ceil(widthPx / dayPx)), today, todayX: (daysBefore + dayShare) * dayPx };
+  return {
+    dayPx,
+    widthPx,
+    firstDay,
+    lastDay: addDaysTo(firstDay, Math.ceil(widthPx / dayPx)),
+    today,
+    todayX: (daysBefore + dayShare) * dayPx,
+  };
 }
 
 /** The left edge of a day. */
 export const xOf = (scale: Scale, day: string): number => daysBetween(scale.firstDay, day) * scale.dayPx;
 
-export const addDaysTo = (day: string, days: number): string => format(addDays(parseISO(day), days), 'yyyy-MM-dd');
+export const addDaysTo = (day: string, days: number): string =>
+  format(addDays(parseISO(day), days), 'yyyy-MM-dd');
 
 /** Each day of the scale, with what its tick and its ground need. */
 export function daysOf(scale: Scale): { day: string; x: number; isMonday: boolean; isWeekend: boolean }[] {

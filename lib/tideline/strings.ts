@@ -33,10 +33,26 @@ export function stringOf(batch: TidelineBatch, endX: number, scale: Scale): TagS
   const needX = xOf(scale, assembly.neededOn) + scale.dayPx / 2;
   const labelWidth = widthOfText(name, 7.2) + widthOfText(day, 6.4) + GAP_PX;
   const common = { fromX: endX, name, day };
-  if (needX < endX + GAP_PX) return { ...common, knotX: null, labelX: endX + GAP_PX, labelSide: 'right', tooLate: true, endX: endX + labelWidth + widthOfText('needed ', 6.4) + GAP_PX };
+  if (needX < endX + GAP_PX)
+    return {
+      ...common,
+      knotX: null,
+      labelX: endX + GAP_PX,
+      labelSide: 'right',
+      tooLate: true,
+      endX: endX + labelWidth + widthOfText('needed ', 6.4) + GAP_PX,
+    };
 
   const knotX = Math.min(needX, scale.widthPx - KNOT_PX);
   const right = knotX + GAP_PX;
-  if (right + labelWidth <= scale.widthPx) return { ...common, knotX, labelX: right, labelSide: 'right', tooLate: false, endX: right + labelWidth };
-  return { ...common, knotX, labelX: Math.max(endX + GAP_PX, knotX - GAP_PX - labelWidth), labelSide: 'left', tooLate: false, endX: knotX + KNOT_PX };
+  if (right + labelWidth <= scale.widthPx)
+    return { ...common, knotX, labelX: right, labelSide: 'right', tooLate: false, endX: right + labelWidth };
+  return {
+    ...common,
+    knotX,
+    labelX: Math.max(endX + GAP_PX, knotX - GAP_PX - labelWidth),
+    labelSide: 'left',
+    tooLate: false,
+    endX: knotX + KNOT_PX,
+  };
 }

@@ -27,37 +27,117 @@ export function whatWaits(tideline: Tideline, roles: readonly Role[]): Waiting[]
       const found = pick(batch, names.get(batch.processorId) ?? '', tideline, has);
       return found ? [{ batch, ...found }] : [];
     })
-    .sort((a, b) => a.rank - b.rank || b.batch.pieces - a.batch.pieces || a.batch.number.localeCompare(b.batch.number));
+    .sort(
+      (a, b) =>
+        a.rank - b.rank || b.batch.pieces - a.batch.pieces || a.batch.number.localeCompare(b.batch.number),
+    );
 }
 
 type Found = Omit<Waiting, 'batch'>;
 
 /** The most pressing thing about one batch for these roles; one line a batch, so that the list stays a list of things to do. */
-function pick(batch: TidelineBatch, processor: string, tideline: Tideline, has: (...roles: Role[]) => boolean): Found | null {
+function pick(
+  batch: TidelineBatch,
+  processor: string,
+  tideline: Tideline,
+  has: (...roles: Role[]) => boolean,
+): Found | null {
   const page = `/batches/${batch.id}`;
   const { nonconformance, openQuestion } = batch;
   if (batch.stage === 'held' && nonconformance && has('inspector')) {
     const days = batch.heldSince === null ? 0 : daysBetween(batch.heldSince, tideline.today);
-    return { rank: RANK.held, what: `Decide on ${nonconformance.number}`, why: `${nonconformance.what}, held ${days} d`, verb: 'Open', href: `/nonconformances/${nonconformance.id}` };
+    return {
+      rank: RANK.held,
+      what: `Decide on ${nonconformance.number}`,
+      why: `${nonconformance.what}, held ${days} d`,
+      verb: 'Open',
+      href: `/nonconformances/${nonconformance.id}`,
+    };
   }
   const late = daysLate(batch, tideline.today, tideline.latenessBasis);
-  if (late > 0 && has('lead')) return { rank: RANK.late, what: `Ask ${processor} for a new date`, why: `${late} d late`, verb: 'Write', href: `${page}#messages` };
-  if (openQuestion && has('lead')) return { rank: RANK.unanswered, what: `Answer ${processor}`, why: `“${openQuestion.body}”`, verb: 'Answer', href: `${page}#messages` };
+  if (late > 0 && has('lead'))
+    return {
+      rank: RANK.late,
+      what: `Ask ${processor} for a new date`,
+      why: `${late} d late`,
+      verb: 'Write',
+      href: `${page}#messages`,
+    };
+  if (openQuestion && has('lead'))
+    return {
+      rank: RANK.unanswered,
+      what: `Answer ${processor}`,
+      why: `“${openQuestion.body}”`,
+      verb: 'Answer',
+      href: `${page}#messages`,
+    };
   return pickToDo(batch, processor, tideline, has);
 }
 
-function pickToDo(batch: TidelineBatch, processor: string, tideline: Tideline, has: (...roles: Role[]) => boolean): Found | null {
+function pickToDo(
+  batch: TidelineBatch,
+  processor: string,
+  tideline: Tideline,
+  has: (...roles: Role[]) => boolean,
+): Found | null {
   const page = `/batches/${batch.id}`;
   const clock = { zone: 'UTC', now: new Date(`${tideline.today}T12:00:00Z`) };
-  const toDo = (what: string, why: string, verb: string, href: string): Found => ({ rank: RANK.toDo, what, why, verb, href });
+  const toDo = (what: string, why: string, verb: string, href: string): Found => ({
+    rank: RANK.toDo,
+    what,
+    why,
+    verb,
+    href,
+  });
   const { stage, invoice } = batch;
-  if (stage === 'building' && has('lead') && batch.leavesOn !== null && batch.leavesOn <= tideline.today) return toDo('Dispatch', batch.leavesOn === tideline.today ? 'leaves today' : `should have left ${dayWords(batch.leavesOn, clock)}`, 'Open', page);
-  if (stage === 'dispatched' && !batch.acknowledged && batch.dispatchedOn !== null && batch.dispatchedOn < tideline.today && has('lead')) return toDo(`Ring ${processor}: not acknowledged`, `left ${dayWords(batch.dispatchedOn, clock)}`, 'Open', page);
-  if (batch.certificatesToProve > 0 && batch.piecesBack > 0 && has('inspector')) return toDo(`Prove ${batch.certificatesToProve === 1 ? 'a certificate' : `${batch.certificatesToProve} certificates`}`, batch.contents, 'Prove', `/certificates/${batch.firstCertificateId ?? ''}`);
-  if (stage === 'returned' && batch.certificatesToProve === 0 && has('lead', 'inspector')) return toDo(`Ask ${processor} for the papers`, 'pieces are back without a certificate to prove', 'Write', `${page}#messages`);
-  if (invoice && !invoice.entered && has('office')) return toDo('Enter an invoice', `from ${processor}`, 'Open', `/invoices/${invoice.id}`);
-  if (invoice?.entered && !invoice.approved && stage === 'proved' && has('office')) return toDo(`Clear and approve invoice ${invoice.number ?? ''}`.trim(), processor, 'Open', `/invoices/${invoice.id}`);
-  if (invoice?.approved && stage === 'proved' && has('office')) return toDo(`Pay invoice ${invoice.number ?? ''}`.trim(), processor, 'Pay', `/invoices/${invoice.id}`);
-  if (stage === 'settled' && has('inspector', 'lead')) return toDo('Release to stock', batch.contents, 'Release', `${page}/release`);
+  if (stage === 'building' && has('lead') && batch.leavesOn !== null && batch.leavesOn <= tideline.today)
+    return toDo(
+      'Dispatch',
+      batch.leavesOn === tideline.today
+        ? 'leaves today'
+        : `should have left ${dayWords(batch.leavesOn, clock)}`,
+      'Open',
+      page,
+    );
+  if (
+    stage === 'dispatched' &&
+    !batch.acknowledged &&
+    batch.dispatchedOn !== null &&
+    batch.dispatchedOn < tideline.today &&
+    has('lead')
+  )
+    return toDo(
+      `Ring ${processor}: not acknowledged`,
+      `left ${dayWords(batch.dispatchedOn, clock)}`,
+      'Open',
+      page,
+    );
+  if (batch.certificatesToProve > 0 && batch.piecesBack > 0 && has('inspector'))
+    return toDo(
+      `Prove ${batch.certificatesToProve === 1 ? 'a certificate' : `${batch.certificatesToProve} certificates`}`,
+      batch.contents,
+      'Prove',
+      `/certificates/${batch.firstCertificateId ?? ''}`,
+    );
+  if (stage === 'returned' && batch.certificatesToProve === 0 && has('lead', 'inspector'))
+    return toDo(
+      `Ask ${processor} for the papers`,
+      'pieces are back without a certificate to prove',
+      'Write',
+      `${page}#messages`,
+    );
+  if (invoice && !invoice.entered && has('office'))
+    return toDo('Enter an invoice', `from ${processor}`, 'Open', `/invoices/${invoice.id}`);
+  if (invoice?.entered && !invoice.approved && stage === 'proved' && has('office'))
+    return toDo(
+      `Clear and approve invoice ${invoice.number ?? ''}`.trim(),
+      processor,
+      'Open',
+      `/invoices/${invoice.id}`,
+    );
+  if (invoice?.approved && stage === 'proved' && has('office'))
+    return toDo(`Pay invoice ${invoice.number ?? ''}`.trim(), processor, 'Pay', `/invoices/${invoice.id}`);
+  if (stage === 'settled' && has('inspector', 'lead'))
+    return toDo('Release to stock', batch.contents, 'Release', `${page}/release`);
   return null;
 }

@@ -18,4 +18,7 @@ export interface TableReference {
   readonly edition: string;
 }
 
-export const referenceTo = (table: Table<unknown>): TableReference => ({ table: table.id, edition: table.edition });
+export const referenceTo = (table: Table<unknown>): TableReference => ({
+  table: table.id,
+  edition: table.edition,
+});

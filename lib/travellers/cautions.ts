@@ -5,5 +5,9 @@ import type { Process } from '@/lib/trade/process';
  * here.
  */
 export function cautionsOf(_process: Process): string[] {
-  return ['Only the work asked here, to the specification at the revision named.', 'Keep the lots apart; each line comes back with its lot number.', 'If anything here and the order differ, stop and call.'];
+  return [
+    'Only the work asked here, to the specification at the revision named.',
+    'Keep the lots apart; each line comes back with its lot number.',
+    'If anything here and the order differ, stop and call.',
+  ];
 }

@@ -50,7 +50,9 @@ export const TravellerContent = Stated.extend({
   requirements: z.array(ContentRequirement),
   cautions: z.array(z.string()),
   /** Blockers that were let pass, with who did and why. */
-  overrides: z.array(z.object({ what: z.string(), reason: z.string(), by: z.string(), at: z.iso.datetime() })),
+  overrides: z.array(
+    z.object({ what: z.string(), reason: z.string(), by: z.string(), at: z.iso.datetime() }),
+  ),
   /** The link that its code opens, and where links begin. The key itself is not kept. Null on a draft. */
   link: z.object({ base: z.string(), linkId: z.string() }).nullable(),
 });
@@ -61,7 +63,18 @@ export const OrderContent = Stated.extend({
   currency: z.string(),
   lotMinimumMinor: z.int(),
   certificationFeeMinor: z.int(),
-  lines: z.array(ContentLine.pick({ lineNo: true, pieces: true, partNumber: true, partRevision: true, partName: true, lotNumber: true, conditionBefore: true, targetCondition: true }).extend({ unitPriceMinor: z.int() })),
+  lines: z.array(
+    ContentLine.pick({
+      lineNo: true,
+      pieces: true,
+      partNumber: true,
+      partRevision: true,
+      partName: true,
+      lotNumber: true,
+      conditionBefore: true,
+      targetCondition: true,
+    }).extend({ unitPriceMinor: z.int() }),
+  ),
   requirements: z.array(ContentRequirement),
 });
 export type OrderContent = z.infer<typeof OrderContent>;
@@ -70,4 +83,5 @@ export const PaperContent = z.discriminatedUnion('kind', [TravellerContent, Orde
 export type PaperContent = z.infer<typeof PaperContent>;
 
 /** Shops that count in dollars print on Letter, all others on A4. */
-export const paperOf = (currency: string): Paper => (currency === 'USD' || currency === 'CAD' ? 'letter' : 'a4');
+export const paperOf = (currency: string): Paper =>
+  currency === 'USD' || currency === 'CAD' ? 'letter' : 'a4';

@@ -20,7 +20,12 @@ export interface Version {
 }
 
 /** Both papers of a batch as they would be stated now. Without a link (a draft) there is no code to scan. */
-export async function readPaperContents(ctx: Ctx, batchId: string, link: string | null, versions: { traveller: Version; order: Version }): Promise<{ traveller: TravellerContent; order: OrderContent }> {
+export async function readPaperContents(
+  ctx: Ctx,
+  batchId: string,
+  link: string | null,
+  versions: { traveller: Version; order: Version },
+): Promise<{ traveller: TravellerContent; order: OrderContent }> {
   const head = await readHead(ctx, batchId);
   const lines = await readContentLines(ctx, batchId);
   const asked = await readRequirements(ctx, batchId);
@@ -35,7 +40,11 @@ export async function readPaperContents(ctx: Ctx, batchId: string, link: string 
     dispatchedAt: batch.dispatchedAt?.toISOString() ?? null,
     wantedBackOn: batch.wantedBackOn,
     shop: { name: shop.name, address: shop.address, phone: shop.phone },
-    processor: { name: processor.name, address: contactName ? [`for ${contactName}`, ...processor.address] : processor.address, phone: processor.phone },
+    processor: {
+      name: processor.name,
+      address: contactName ? [`for ${contactName}`, ...processor.address] : processor.address,
+      phone: processor.phone,
+    },
     process: batch.process,
     specification: specificationWords(batch),
     note: batch.note,
@@ -58,7 +67,29 @@ export async function readPaperContents(ctx: Ctx, batchId: string, link: string 
       currency: batch.currency,
       lotMinimumMinor: batch.lotMinimumMinor,
       certificationFeeMinor: batch.certificationFeeMinor,
-      lines: lines.map(({ lineNo, pieces, partNumber, partRevision, partName, lotNumber, conditionBefore, targetCondition, unitPriceMinor }) => ({ lineNo, pieces, partNumber, partRevision, partName, lotNumber, conditionBefore, targetCondition, unitPriceMinor })),
+      lines: lines.map(
+        ({
+          lineNo,
+          pieces,
+          partNumber,
+          partRevision,
+          partName,
+          lotNumber,
+          conditionBefore,
+          targetCondition,
+          unitPriceMinor,
+        }) => ({
+          lineNo,
+          pieces,
+          partNumber,
+          partRevision,
+          partName,
+          lotNumber,
+          conditionBefore,
+          targetCondition,
+          unitPriceMinor,
+        }),
+      ),
     },
   };
 }
@@ -67,7 +98,12 @@ const copied = ({ documentVersion, changes }: Version) => ({ documentVersion, ch
 
 async function readHead(ctx: Ctx, batchId: string) {
   const [head] = await ctx.tx
-    .select({ batch: batches, shop: shops, processor: { name: processors.name, address: processors.address, phone: processors.phone }, contactName: shopProcessors.contactName })
+    .select({
+      batch: batches,
+      shop: shops,
+      processor: { name: processors.name, address: processors.address, phone: processors.phone },
+      contactName: shopProcessors.contactName,
+    })
     .from(batches)
     .innerJoin(shops, eq(shops.id, batches.shopId))
     .innerJoin(processors, eq(processors.id, batches.processorId))
@@ -80,20 +116,35 @@ async function readHead(ctx: Ctx, batchId: string) {
 /** What was frozen at dispatch; before it, what the line says now. */
 async function readContentLines(ctx: Ctx, batchId: string) {
   const lines = await readLinesAsTheyAre(ctx, batchId);
-  return lines.map(({ line, now }) => ({ ...(line.frozen ?? now), lineNo: line.lineNo, pieces: line.pieces, loadNo: line.loadNo, unitPriceMinor: line.unitPriceMinor }));
+  return lines.map(({ line, now }) => ({
+    ...(line.frozen ?? now),
+    lineNo: line.lineNo,
+    pieces: line.pieces,
+    loadNo: line.loadNo,
+    unitPriceMinor: line.unitPriceMinor,
+  }));
 }
 
 /** The same requirement of several lines is said once, with the lines it holds for. */
 async function readRequirements(ctx: Ctx, batchId: string): Promise<TravellerContent['requirements']> {
   const rows = await ctx.tx
-    .select({ lineNo: batchLines.lineNo, characteristic: requirements.characteristic, limit: requirements.limit, unit: requirements.unit, source: requirements.source, sourceText: requirements.sourceText })
+    .select({
+      lineNo: batchLines.lineNo,
+      characteristic: requirements.characteristic,
+      limit: requirements.limit,
+      unit: requirements.unit,
+      source: requirements.source,
+      sourceText: requirements.sourceText,
+    })
     .from(requirements)
     .leftJoin(batchLines, eq(batchLines.id, requirements.lineId))
     .where(eq(requirements.batchId, batchId))
     .orderBy(asc(batchLines.lineNo), asc(requirements.seq));
   const said = new Map<string, TravellerContent['requirements'][number]>();
   for (const { lineNo, characteristic, limit, unit, source, sourceText } of rows) {
-    const key = [lineNo === null ? 'all' : 'line', characteristic, limit, unit, source, sourceText].join('\n');
+    const key = [lineNo === null ? 'all' : 'line', characteristic, limit, unit, source, sourceText].join(
+      '\n',
+    );
     const one = said.get(key) ?? { lines: [], characteristic, limit, unit, source: sourceText || source };
     if (lineNo !== null) one.lines.push(lineNo);
     said.set(key, one);
@@ -104,11 +155,31 @@ async function readRequirements(ctx: Ctx, batchId: string): Promise<TravellerCon
 async function readPassed(ctx: Ctx, batchId: string): Promise<TravellerContent['overrides']> {
   const passed = await readOverrides(ctx, batchId);
   if (passed.length === 0) return [];
-  const people = await ctx.tx.select({ id: users.id, name: users.name }).from(users).where(inArray(users.id, passed.map((one) => one.by)));
-  const lineNos = new Map((await ctx.tx.select({ id: batchLines.id, lineNo: batchLines.lineNo }).from(batchLines).where(eq(batchLines.batchId, batchId))).map((line) => [line.id, line.lineNo]));
+  const people = await ctx.tx
+    .select({ id: users.id, name: users.name })
+    .from(users)
+    .where(
+      inArray(
+        users.id,
+        passed.map((one) => one.by),
+      ),
+    );
+  const lineNos = new Map(
+    (
+      await ctx.tx
+        .select({ id: batchLines.id, lineNo: batchLines.lineNo })
+        .from(batchLines)
+        .where(eq(batchLines.batchId, batchId))
+    ).map((line) => [line.id, line.lineNo]),
+  );
   return passed.map((one) => {
     const lineNo = lineNos.get(one.subject);
     const what = OVERRIDDEN_WORDS[one.check] ?? one.check;
-    return { what: lineNo === undefined ? what : `line ${lineNo}: ${what}`, reason: one.reason, by: people.find((person) => person.id === one.by)?.name ?? 'an admin', at: one.createdAt.toISOString() };
+    return {
+      what: lineNo === undefined ? what : `line ${lineNo}: ${what}`,
+      reason: one.reason,
+      by: people.find((person) => person.id === one.by)?.name ?? 'an admin',
+      at: one.createdAt.toISOString(),
+    };
   });
 }

@@ -41,9 +41,18 @@ interface Sent extends Caller {
 }
 
 /** Calls an endpoint as a browser or a program would, through its route. */
-export async function send(declaration: Declaration, input: Record<string, unknown>, sent: Sent = {}): Promise<Response> {
+export async function send(
+  declaration: Declaration,
+  input: Record<string, unknown>,
+  sent: Sent = {},
+): Promise<Response> {
   const { url, body } = requestOf(declaration, input);
-  const params = Object.fromEntries([...declaration.path.matchAll(/\{(\w+)\}/g)].map((match) => [match[1] ?? '', String(input[match[1] ?? ''])]));
+  const params = Object.fromEntries(
+    [...declaration.path.matchAll(/\{(\w+)\}/g)].map((match) => [
+      match[1] ?? '',
+      String(input[match[1] ?? '']),
+    ]),
+  );
   const handler = await handlerOf(declaration);
   const text = sent.rawBody ?? body;
   const request = new Request(new URL(url, env.APP_URL), {
@@ -68,7 +77,11 @@ async function handlerOf({ method, path }: Declaration): Promise<Handler> {
 }
 
 /** The answer of a call that must succeed. */
-export async function ask<D extends Declaration>(declaration: D, input: InputOf<D>, sent: Sent = {}): Promise<OutputOf<D>> {
+export async function ask<D extends Declaration>(
+  declaration: D,
+  input: InputOf<D>,
+  sent: Sent = {},
+): Promise<OutputOf<D>> {
   const response = await send(declaration, input as Record<string, unknown>, sent);
   const body: unknown = await response.json();
   if (!response.ok) throw new Error(`${declaration.id} answered ${response.status}: ${JSON.stringify(body)}`);
@@ -77,7 +90,8 @@ export async function ask<D extends Declaration>(declaration: D, input: InputOf<
 
 /** The problem of a call that must be refused, with the form of RFC 9457. */
 export async function refusal(response: Response): Promise<Problem> {
-  if (response.headers.get('content-type') !== 'application/problem+json') throw new Error(`not a problem: ${response.status} ${await response.text()}`);
+  if (response.headers.get('content-type') !== 'application/problem+json')
+    throw new Error(`not a problem: ${response.status} ${await response.text()}`);
   return Problem.parse(await response.json());
 }
 
@@ -88,10 +102,20 @@ export async function cookieFor(claims: SessionClaims): Promise<string> {
 }
 
 /** A person with these roles in a shop or at a processor, and their cookie. */
-export async function makeSignedIn(owner: Db, organisation: { shopId: string } | { processorId: string }, roles: readonly Role[]): Promise<{ userId: string; email: string; cookie: string }> {
+export async function makeSignedIn(
+  owner: Db,
+  organisation: { shopId: string } | { processorId: string },
+  roles: readonly Role[],
+): Promise<{ userId: string; email: string; cookie: string }> {
   const userId = newId();
   const email = `${roles.join('-')}-${userId}@people.test`;
-  await owner.insert(users).values({ id: userId, email, name: `Person ${roles.join(' ')}`, createdAt: TODAY });
+  await owner
+    .insert(users)
+    .values({ id: userId, email, name: `Person ${roles.join(' ')}`, createdAt: TODAY });
   await owner.insert(memberships).values({ userId, roles: [...roles], ...organisation, createdAt: TODAY });
-  return { userId, email, cookie: await cookieFor({ kind: 'person', userId, sessionVersion: 1, ...organisation }) };
+  return {
+    userId,
+    email,
+    cookie: await cookieFor({ kind: 'person', userId, sessionVersion: 1, ...organisation }),
+  };
 }

@@ -17,7 +17,12 @@ test('alive is one thing, ready another: each that is needed is named with its t
   const response = await ready();
   expect(response.status).toBe(200);
   const { checks } = (await response.json()) as { checks: { name: string; ok: boolean; ms: number }[] };
-  expect(checks.map(({ name, ok }) => [name, ok])).toEqual([['database', true], ['storage', true], ['mail', true], ['queue', true]]);
+  expect(checks.map(({ name, ok }) => [name, ok])).toEqual([
+    ['database', true],
+    ['storage', true],
+    ['mail', true],
+    ['queue', true],
+  ]);
 });
 
 test('without its database the server is not ready, and still says so', async () => {
@@ -37,14 +42,29 @@ test('a replica is asked beside its primary', async () => {
 
 interface Document {
   openapi: string;
-  paths: Record<string, Record<string, { operationId: string; parameters: { name: string; in: string }[]; 'x-permission': string; security?: unknown[] }>>;
+  paths: Record<
+    string,
+    Record<
+      string,
+      {
+        operationId: string;
+        parameters: { name: string; in: string }[];
+        'x-permission': string;
+        security?: unknown[];
+      }
+    >
+  >;
 }
 
 test('the file for programs holds every read and write, with its permission and its parameters', async () => {
   const document = (await openapi().json()) as Document;
   expect(document.openapi).toBe('3.1.0');
-  const operations = Object.entries(document.paths).flatMap(([path, methods]) => Object.values(methods).map((operation) => ({ path, ...operation })));
-  expect(operations.map(({ operationId }) => operationId).sort()).toEqual(ALL_ENDPOINTS.map(({ declaration }) => declaration.id).sort());
+  const operations = Object.entries(document.paths).flatMap(([path, methods]) =>
+    Object.values(methods).map((operation) => ({ path, ...operation })),
+  );
+  expect(operations.map(({ operationId }) => operationId).sort()).toEqual(
+    ALL_ENDPOINTS.map(({ declaration }) => declaration.id).sort(),
+  );
   for (const { path, parameters, ...operation } of operations) {
     const named = [...path.matchAll(/\{(\w+)\}/g)].map((match) => match[1]);
     expect(parameters.filter((parameter) => parameter.in === 'path').map(({ name }) => name)).toEqual(named);
@@ -59,7 +79,11 @@ test('the page for programs says the same in words', () => {
   expect(invite?.input).toEqual(
     expect.arrayContaining([
       expect.objectContaining({ name: 'email', required: true }),
-      expect.objectContaining({ name: 'roles', kind: 'list of one of lead, inspector, office, admin, auditor', limits: 'at least 1 entries' }),
+      expect.objectContaining({
+        name: 'roles',
+        kind: 'list of one of lead, inspector, office, admin, auditor',
+        limits: 'at least 1 entries',
+      }),
     ]),
   );
 });

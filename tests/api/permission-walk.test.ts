@@ -42,25 +42,71 @@ let linkId: string;
 beforeAll(async () => {
   [shopA, shopB] = [await makeWorld(base.db, base.owner), await makeWorld(base.db, base.owner)];
   await makeApprovedInvoice(shopA, base.owner);
-  const [batch, linked] = await shopA.as(ALL, async (ctx) => [await makeDispatchedBatch(ctx, shopA.processorId), await makeDispatchedBatch(ctx, shopA.processorId)] as const);
+  const [batch, linked] = await shopA.as(
+    ALL,
+    async (ctx) =>
+      [
+        await makeDispatchedBatch(ctx, shopA.processorId),
+        await makeDispatchedBatch(ctx, shopA.processorId),
+      ] as const,
+  );
   linkId = newId();
-  await base.owner.insert(batchLinks).values({ id: linkId, shopId: shopA.shopId, batchId: linked.id, processorId: shopA.processorId, tokenHash: randomUUID(), createdAt: new Date() });
+  await base.owner
+    .insert(batchLinks)
+    .values({
+      id: linkId,
+      shopId: shopA.shopId,
+      batchId: linked.id,
+      processorId: shopA.processorId,
+      tokenHash: randomUUID(),
+      createdAt: new Date(),
+    });
   known = { ...(await idsOf(shopA)), batchId: batch.id };
 }, 120_000);
 
-const TABLES = { batchId: 'batches', lineId: 'batch_lines', requirementId: 'requirements', lotId: 'lots', partId: 'parts', stepId: 'route_steps', certificateId: 'certificates', invoiceId: 'invoices', fileId: 'files', receiptId: 'receipts', nonconformanceId: 'nonconformances', documentId: 'batch_documents', approvalId: 'approvals', releaseId: 'releases', locationId: 'locations', messageId: 'messages', paymentId: 'payments', linkId: 'batch_links', assemblyId: 'assemblies' } as const;
+const TABLES = {
+  batchId: 'batches',
+  lineId: 'batch_lines',
+  requirementId: 'requirements',
+  lotId: 'lots',
+  partId: 'parts',
+  stepId: 'route_steps',
+  certificateId: 'certificates',
+  invoiceId: 'invoices',
+  fileId: 'files',
+  receiptId: 'receipts',
+  nonconformanceId: 'nonconformances',
+  documentId: 'batch_documents',
+  approvalId: 'approvals',
+  releaseId: 'releases',
+  locationId: 'locations',
+  messageId: 'messages',
+  paymentId: 'payments',
+  linkId: 'batch_links',
+  assemblyId: 'assemblies',
+} as const;
 
 /** One thing of each kind; where the world has none, an id of nothing. */
 async function idsOf(world: World): Promise<Record<string, string>> {
-  const found: Record<string, string> = { processorId: world.processorId, personId: world.userId, userId: world.userId };
+  const found: Record<string, string> = {
+    processorId: world.processorId,
+    personId: world.userId,
+    userId: world.userId,
+  };
   for (const [name, table] of Object.entries(TABLES)) {
-    const { rows } = await base.owner.execute<{ id: string }>(sql`select id from ${sql.raw(table)} where shop_id = ${world.shopId} order by id limit 1`);
+    const { rows } = await base.owner.execute<{ id: string }>(
+      sql`select id from ${sql.raw(table)} where shop_id = ${world.shopId} order by id limit 1`,
+    );
     found[name] = rows[0]?.id ?? randomUUID();
   }
   return found;
 }
 
-const person = (organisation: () => { shopId: string } | { processorId: string }, role: Role, says: string): Walker => ({
+const person = (
+  organisation: () => { shopId: string } | { processorId: string },
+  role: Role,
+  says: string,
+): Walker => ({
   says,
   role,
   side: role === 'processor' ? 'processor' : 'shop',
@@ -80,7 +126,12 @@ const strangers: readonly Walker[] = [
   person(() => ({ processorId: shopB.processorId }), 'processor', 'another processor'),
 ];
 
-const SIDES: Record<Side, readonly Walker['side'][]> = { public: ['shop', 'processor', 'nobody'], any: ['shop', 'processor'], shop: ['shop'], portal: ['processor'] };
+const SIDES: Record<Side, readonly Walker['side'][]> = {
+  public: ['shop', 'processor', 'nobody'],
+  any: ['shop', 'processor'],
+  shop: ['shop'],
+  portal: ['processor'],
+};
 
 /** The whole table, read once more and without the code that enforces it. */
 function mayWalk({ permission, side }: Declaration, walker: Walker): 'yes' | 401 | 403 {
@@ -97,7 +148,11 @@ interface Step {
 
 async function step(declaration: Declaration, walker: Walker): Promise<Step> {
   const cookie = await walker.cookie();
-  const response = await send(declaration, sampleInput(declaration, known), cookie === null ? {} : { cookie });
+  const response = await send(
+    declaration,
+    sampleInput(declaration, known),
+    cookie === null ? {} : { cookie },
+  );
   // What streams is not read to its end: whether it came at all is what counts.
   const isText = /json|text/.test(response.headers.get('content-type') ?? '');
   return { status: response.status, text: isText ? await response.text() : '' };
@@ -107,10 +162,14 @@ const nameOf = ({ method, path }: Declaration): string => `${method.toUpperCase(
 
 /** Everything of shop A, as one line a table: what must not have moved. */
 async function stateOfA(): Promise<string[]> {
-  const { rows: tables } = await base.owner.execute<{ name: string }>(sql`select table_name as name from information_schema.columns where table_schema = 'public' and column_name = 'shop_id' order by 1`);
+  const { rows: tables } = await base.owner.execute<{ name: string }>(
+    sql`select table_name as name from information_schema.columns where table_schema = 'public' and column_name = 'shop_id' order by 1`,
+  );
   const state: string[] = [];
   for (const { name } of tables) {
-    const { rows } = await base.owner.execute<{ sum: string | null }>(sql`select md5(string_agg(t::text, '|' order by t::text)) as sum from ${sql.raw(`"${name}"`)} t where shop_id = ${shopA.shopId}`);
+    const { rows } = await base.owner.execute<{ sum: string | null }>(
+      sql`select md5(string_agg(t::text, '|' order by t::text)) as sum from ${sql.raw(`"${name}"`)} t where shop_id = ${shopA.shopId}`,
+    );
     state.push(`${name} ${rows[0]?.sum ?? 'empty'}`);
   }
   return state;
@@ -120,29 +179,40 @@ test('the walk has somewhere to go', () => {
   expect(declarations.length).toBeGreaterThan(100);
 });
 
-test('strangers get nothing of the shop, change nothing of it, and nothing breaks', { timeout: 600_000 }, async () => {
-  const before = await stateOfA();
-  const idsOfA = new Set(Object.values({ ...(await idsOf(shopA)), shopId: shopA.shopId }).map(String));
-  const faults: string[] = [];
-  for (const walker of strangers) {
-    for (const declaration of declarations) {
-      const { status, text } = await step(declaration, walker);
-      const expected = mayWalk(declaration, walker);
-      const asksForAThing = /\{(?!token)\w+\}/.test(declaration.path);
-      if (status >= 500) faults.push(`${walker.says}: ${nameOf(declaration)} broke with ${status} ${text}`);
-      else if (expected !== 'yes' && status !== expected) faults.push(`${walker.says}: ${nameOf(declaration)} is ${status}, the table says ${expected}`);
-      else if (status < 300 && asksForAThing && (declaration.method !== 'get' || ANY_ID.test(text))) faults.push(`${walker.says}: ${nameOf(declaration)} answered ${status} about a thing of another shop`);
-      else if (status < 300 && [...idsOfA].some((id) => text.includes(id))) faults.push(`${walker.says}: ${nameOf(declaration)} told of the other shop: ${text.slice(0, 200)}`);
+test(
+  'strangers get nothing of the shop, change nothing of it, and nothing breaks',
+  { timeout: 600_000 },
+  async () => {
+    const before = await stateOfA();
+    const idsOfA = new Set(Object.values({ ...(await idsOf(shopA)), shopId: shopA.shopId }).map(String));
+    const faults: string[] = [];
+    for (const walker of strangers) {
+      for (const declaration of declarations) {
+        const { status, text } = await step(declaration, walker);
+        const expected = mayWalk(declaration, walker);
+        const asksForAThing = /\{(?!token)\w+\}/.test(declaration.path);
+        if (status >= 500) faults.push(`${walker.says}: ${nameOf(declaration)} broke with ${status} ${text}`);
+        else if (expected !== 'yes' && status !== expected)
+          faults.push(`${walker.says}: ${nameOf(declaration)} is ${status}, the table says ${expected}`);
+        else if (status < 300 && asksForAThing && (declaration.method !== 'get' || ANY_ID.test(text)))
+          faults.push(
+            `${walker.says}: ${nameOf(declaration)} answered ${status} about a thing of another shop`,
+          );
+        else if (status < 300 && [...idsOfA].some((id) => text.includes(id)))
+          faults.push(`${walker.says}: ${nameOf(declaration)} told of the other shop: ${text.slice(0, 200)}`);
+      }
     }
-  }
-  expect(faults).toEqual([]);
-  expect(await stateOfA()).toEqual(before);
-});
+    expect(faults).toEqual([]);
+    expect(await stateOfA()).toEqual(before);
+  },
+);
 
 test('the link of one batch reaches no other', { timeout: 600_000 }, async () => {
   const link = own.find((walker) => walker.says === 'link');
   if (!link) throw new Error('no link');
-  const about = declarations.filter((declaration) => mayWalk(declaration, link) === 'yes' && declaration.path.includes('{batchId}'));
+  const about = declarations.filter(
+    (declaration) => mayWalk(declaration, link) === 'yes' && declaration.path.includes('{batchId}'),
+  );
   expect(about.length).toBeGreaterThan(3);
   const faults: string[] = [];
   for (const declaration of about) {
@@ -152,31 +222,37 @@ test('the link of one batch reaches no other', { timeout: 600_000 }, async () =>
   expect(faults).toEqual([]);
 });
 
-test('each role may do what the table of permissions says, no more and no less', { timeout: 900_000 }, async () => {
-  const faults: string[] = [];
-  const walked = new Map<string, number>();
-  // Those who may not go first: afterwards there is less to refuse.
-  for (const wanted of ['no', 'yes'] as const) {
-    for (const walker of own) {
-      for (const declaration of declarations) {
-        const expected = mayWalk(declaration, walker);
-        if ((expected === 'yes') !== (wanted === 'yes')) continue;
-        const { status, text } = await step(declaration, walker);
-        const fault = faultOf(expected, status, text);
-        if (expected === 'yes') walked.set(nameOf(declaration), Math.min(walked.get(nameOf(declaration)) ?? 999, status));
-        if (fault !== null) faults.push(`${walker.says}: ${nameOf(declaration)} ${fault}`);
+test(
+  'each role may do what the table of permissions says, no more and no less',
+  { timeout: 900_000 },
+  async () => {
+    const faults: string[] = [];
+    const walked = new Map<string, number>();
+    // Those who may not go first: afterwards there is less to refuse.
+    for (const wanted of ['no', 'yes'] as const) {
+      for (const walker of own) {
+        for (const declaration of declarations) {
+          const expected = mayWalk(declaration, walker);
+          if ((expected === 'yes') !== (wanted === 'yes')) continue;
+          const { status, text } = await step(declaration, walker);
+          const fault = faultOf(expected, status, text);
+          if (expected === 'yes')
+            walked.set(nameOf(declaration), Math.min(walked.get(nameOf(declaration)) ?? 999, status));
+          if (fault !== null) faults.push(`${walker.says}: ${nameOf(declaration)} ${fault}`);
+        }
       }
     }
-  }
-  expect(faults).toEqual([]);
-  // A walk that is stopped at the gate by its own input would prove little about what lies behind.
-  const stopped = [...walked].filter(([, status]) => status === 400).map(([name]) => name);
-  expect(stopped.length).toBeLessThan(walked.size / 6);
-});
+    expect(faults).toEqual([]);
+    // A walk that is stopped at the gate by its own input would prove little about what lies behind.
+    const stopped = [...walked].filter(([, status]) => status === 400).map(([name]) => name);
+    expect(stopped.length).toBeLessThan(walked.size / 6);
+  },
+);
 
 function faultOf(expected: 'yes' | 401 | 403, status: number, text: string): string | null {
   if (status >= 500) return `broke with ${status} ${text}`;
   if (expected !== 'yes') return status === expected ? null : `is ${status}, the table says ${expected}`;
-  if (status === 401 || text.includes(NOT_YOUR_ROLE) || text.includes(NOT_YOUR_SIDE)) return `is refused with ${status}, the table allows it`;
+  if (status === 401 || text.includes(NOT_YOUR_ROLE) || text.includes(NOT_YOUR_SIDE))
+    return `is refused with ${status}, the table allows it`;
   return null;
 }

@@ -26,11 +26,21 @@ interface Schema {
  *
  * @param known values by the name of their field: ids of things that exist.
  */
-export function sampleInput(declaration: Declaration, known: Readonly<Record<string, unknown>>): Record<string, unknown> {
-  const schema = z.toJSONSchema(declaration.input, { io: 'input', unrepresentable: 'any', target: 'draft-2020-12' }) as Schema;
+export function sampleInput(
+  declaration: Declaration,
+  known: Readonly<Record<string, unknown>>,
+): Record<string, unknown> {
+  const schema = z.toJSONSchema(declaration.input, {
+    io: 'input',
+    unrepresentable: 'any',
+    target: 'draft-2020-12',
+  }) as Schema;
   const sample = sampleOf(schema, '', known) as Record<string, unknown>;
   const inPath = [...declaration.path.matchAll(/\{(\w+)\}/g)].map((match) => match[1] ?? '');
-  return { ...sample, ...Object.fromEntries(inPath.map((name) => [name, known[name] ?? sample[name] ?? randomUUID()])) };
+  return {
+    ...sample,
+    ...Object.fromEntries(inPath.map((name) => [name, known[name] ?? sample[name] ?? randomUUID()])),
+  };
 }
 
 function sampleOf(schema: Schema, name: string, known: Readonly<Record<string, unknown>>): unknown {
@@ -41,9 +51,16 @@ function sampleOf(schema: Schema, name: string, known: Readonly<Record<string, u
   if (choice) return sampleOf(choice, name, known);
   switch (schema.type) {
     case 'object':
-      return Object.fromEntries((schema.required ?? []).map((field) => [field, sampleOf(schema.properties?.[field] ?? {}, field, known)]));
+      return Object.fromEntries(
+        (schema.required ?? []).map((field) => [
+          field,
+          sampleOf(schema.properties?.[field] ?? {}, field, known),
+        ]),
+      );
     case 'array':
-      return Array.from({ length: schema.minItems ?? 0 }, () => sampleOf(schema.items ?? {}, name.replace(/s$/, ''), known));
+      return Array.from({ length: schema.minItems ?? 0 }, () =>
+        sampleOf(schema.items ?? {}, name.replace(/s$/, ''), known),
+      );
     case 'integer':
     case 'number':
       return Math.max(schema.minimum ?? 1, 1);

@@ -8,7 +8,11 @@ import { PERMISSIONS } from '@/lib/auth/permissions';
 import { filesBelow, textOf } from './sources';
 
 /** Every endpoint by the name that a route imports. */
-const byName = new Map(Object.values(import.meta.glob<Record<string, Endpoint>>('/lib/**/*endpoints.ts', { eager: true })).flatMap((module) => Object.entries(module)));
+const byName = new Map(
+  Object.values(import.meta.glob<Record<string, Endpoint>>('/lib/**/*endpoints.ts', { eager: true })).flatMap(
+    (module) => Object.entries(module),
+  ),
+);
 
 /** Routes that are not a read or write of ours: the sign-in library's own, and what a machine asks of a machine. */
 const NOT_ENDPOINTS: readonly string[] = [
@@ -30,8 +34,16 @@ interface Route {
 }
 
 function routesOf(file: string): Route[] {
-  const path = file.replace(/^app\/api/, '').replace(/\/route\.ts$/, '').replaceAll('[', '{').replaceAll(']', '}');
-  return [...textOf(file).matchAll(/export const (GET|POST|PUT|PATCH|DELETE)(?:: \w+)? = serve(?:Raw)?\((\w+)[,)]/g)].map((match) => ({ file, method: (match[1] ?? '').toLowerCase(), path, endpoint: match[2] ?? '' }));
+  const path = file
+    .replace(/^app\/api/, '')
+    .replace(/\/route\.ts$/, '')
+    .replaceAll('[', '{')
+    .replaceAll(']', '}');
+  return [
+    ...textOf(file).matchAll(
+      /export const (GET|POST|PUT|PATCH|DELETE)(?:: \w+)? = serve(?:Raw)?\((\w+)[,)]/g,
+    ),
+  ].map((match) => ({ file, method: (match[1] ?? '').toLowerCase(), path, endpoint: match[2] ?? '' }));
 }
 
 test('every endpoint has its route, and every route is one endpoint', () => {
@@ -48,31 +60,45 @@ test('a route serves the endpoint that declares its path', () => {
 });
 
 test('a route file does nothing but serve', () => {
-  const more = routeFiles.filter((file) => !NOT_ENDPOINTS.includes(file)).filter((file) => {
-    const rest = textOf(file)
-      .replaceAll(/import [^;]+;/g, '')
-      .replaceAll(/export const (GET|POST|PUT|PATCH|DELETE)(: \w+)? = serve(Raw)?\(\w+(, '[\w-]+')?\);?/g, '')
-      .replaceAll(/\/\*\*[\s\S]*?\*\/|\/\/.*/g, '')
-      .replaceAll(/export const (dynamic|runtime|maxDuration) = [^;]+;/g, '');
-    return rest.trim() !== '';
-  });
+  const more = routeFiles
+    .filter((file) => !NOT_ENDPOINTS.includes(file))
+    .filter((file) => {
+      const rest = textOf(file)
+        .replaceAll(/import [^;]+;/g, '')
+        .replaceAll(
+          /export const (GET|POST|PUT|PATCH|DELETE)(: \w+)? = serve(Raw)?\(\w+(, '[\w-]+')?\);?/g,
+          '',
+        )
+        .replaceAll(/\/\*\*[\s\S]*?\*\/|\/\/.*/g, '')
+        .replaceAll(/export const (dynamic|runtime|maxDuration) = [^;]+;/g, '');
+      return rest.trim() !== '';
+    });
   expect(more).toEqual([]);
 });
 
 test('operations have names, summaries and permissions of their own', () => {
   const ids = ALL_ENDPOINTS.map(({ declaration }) => declaration.id);
   expect(new Set(ids).size).toBe(ids.length);
-  const poor = ALL_ENDPOINTS.filter(({ declaration }) => declaration.summary.length < 10 || !(declaration.permission in PERMISSIONS)).map(({ declaration }) => declaration.id);
+  const poor = ALL_ENDPOINTS.filter(
+    ({ declaration }) => declaration.summary.length < 10 || !(declaration.permission in PERMISSIONS),
+  ).map(({ declaration }) => declaration.id);
   expect(poor).toEqual([]);
 });
 
 test('every parameter of a path is part of what goes in', () => {
-  const missing = ALL_ENDPOINTS.flatMap(({ declaration }) => [...declaration.path.matchAll(/\{(\w+)\}/g)].map((match) => match[1] ?? '').filter((name) => !(name in declaration.input.shape)).map((name) => `${declaration.id}: ${name}`));
+  const missing = ALL_ENDPOINTS.flatMap(({ declaration }) =>
+    [...declaration.path.matchAll(/\{(\w+)\}/g)]
+      .map((match) => match[1] ?? '')
+      .filter((name) => !(name in declaration.input.shape))
+      .map((name) => `${declaration.id}: ${name}`),
+  );
   expect(missing).toEqual([]);
 });
 
 test('what is named for everyone is only what somebody without an account needs', () => {
-  const open = ALL_ENDPOINTS.filter(({ declaration }) => PERMISSIONS[declaration.permission] === 'everyone').map(({ declaration }) => declaration.side);
+  const open = ALL_ENDPOINTS.filter(
+    ({ declaration }) => PERMISSIONS[declaration.permission] === 'everyone',
+  ).map(({ declaration }) => declaration.side);
   expect(new Set(open)).toEqual(new Set(['public']));
 });
 

@@ -7,14 +7,18 @@ const ROOT = process.cwd();
 /** Every source file below a folder, as paths from the root. */
 export function filesBelow(folder: string, end = /\.tsx?$/): string[] {
   return readdirSync(join(ROOT, folder), { withFileTypes: true })
-    .flatMap((entry) => (entry.isDirectory() ? filesBelow(`${folder}/${entry.name}`, end) : [`${folder}/${entry.name}`]))
+    .flatMap((entry) =>
+      entry.isDirectory() ? filesBelow(`${folder}/${entry.name}`, end) : [`${folder}/${entry.name}`],
+    )
     .filter((file) => end.test(file))
     .sort();
 }
 
 export const textOf = remembered((file: string): string => readFileSync(join(ROOT, file), 'utf8'));
 
-const sourceOf = remembered((file: string) => ts.createSourceFile(file, textOf(file), ts.ScriptTarget.Latest, true));
+const sourceOf = remembered((file: string) =>
+  ts.createSourceFile(file, textOf(file), ts.ScriptTarget.Latest, true),
+);
 
 interface FunctionSource {
   file: string;
@@ -30,15 +34,34 @@ interface FunctionSource {
 /** The functions that a file declares at its top, with what they call. */
 export const functionsOf = remembered((file: string): FunctionSource[] => {
   return sourceOf(file).statements.flatMap((statement) => {
-    if (ts.isFunctionDeclaration(statement) && statement.name && statement.body) return [functionSource({ file, name: statement.name.text, isExported: isExported(statement) }, statement, statement.body)];
+    if (ts.isFunctionDeclaration(statement) && statement.name && statement.body)
+      return [
+        functionSource(
+          { file, name: statement.name.text, isExported: isExported(statement) },
+          statement,
+          statement.body,
+        ),
+      ];
     if (!ts.isVariableStatement(statement)) return [];
     return statement.declarationList.declarations.flatMap(({ name, initializer }) =>
-      ts.isIdentifier(name) && initializer && ts.isArrowFunction(initializer) ? [functionSource({ file, name: name.text, isExported: isExported(statement) }, initializer, initializer.body)] : [],
+      ts.isIdentifier(name) && initializer && ts.isArrowFunction(initializer)
+        ? [
+            functionSource(
+              { file, name: name.text, isExported: isExported(statement) },
+              initializer,
+              initializer.body,
+            ),
+          ]
+        : [],
     );
   });
 });
 
-function functionSource(named: Pick<FunctionSource, 'file' | 'name' | 'isExported'>, node: ts.FunctionDeclaration | ts.ArrowFunction, body: ts.ConciseBody): FunctionSource {
+function functionSource(
+  named: Pick<FunctionSource, 'file' | 'name' | 'isExported'>,
+  node: ts.FunctionDeclaration | ts.ArrowFunction,
+  body: ts.ConciseBody,
+): FunctionSource {
   return {
     ...named,
     parameters: node.parameters.map((parameter) => parameter.type?.getText() ?? ''),
@@ -47,14 +70,17 @@ function functionSource(named: Pick<FunctionSource, 'file' | 'name' | 'isExporte
   };
 }
 
-const isExported = (node: ts.Node): boolean => ts.canHaveModifiers(node) && (ts.getModifiers(node)?.some((modifier) => modifier.kind === ts.SyntaxKind.ExportKeyword) ?? false);
+const isExported = (node: ts.Node): boolean =>
+  ts.canHaveModifiers(node) &&
+  (ts.getModifiers(node)?.some((modifier) => modifier.kind === ts.SyntaxKind.ExportKeyword) ?? false);
 
 function callsIn(body: ts.Node): string[] {
   const calls: string[] = [];
   const visit = (node: ts.Node): void => {
     if (ts.isCallExpression(node) && ts.isIdentifier(node.expression)) calls.push(node.expression.text);
     // A function that is handed on (`then(() => f)`, `work(f)`) counts as called by whoever hands it on.
-    if (ts.isIdentifier(node) && ts.isCallExpression(node.parent) && node.parent.arguments.includes(node)) calls.push(node.text);
+    if (ts.isIdentifier(node) && ts.isCallExpression(node.parent) && node.parent.arguments.includes(node))
+      calls.push(node.text);
     ts.forEachChild(node, visit);
   };
   visit(body);
@@ -71,7 +97,9 @@ export const importsOf = remembered((file: string): Map<string, { from: string; 
     const bindings = statement.importClause?.namedBindings;
     if (from === null || !bindings) continue;
     if (ts.isNamespaceImport(bindings)) found.set(bindings.name.text, { from, name: '*' });
-    else for (const element of bindings.elements) found.set(element.name.text, { from, name: (element.propertyName ?? element.name).text });
+    else
+      for (const element of bindings.elements)
+        found.set(element.name.text, { from, name: (element.propertyName ?? element.name).text });
   }
   return found;
 });

@@ -29,14 +29,30 @@ async function main(): Promise<void> {
   await prepareDatabase(ownerUrl);
   const client = new pg.Client({ connectionString: ownerUrl });
   await client.connect();
-  console.log(`Filling ${LOTS.toLocaleString('en-US')} lots and ${BATCHES.toLocaleString('en-US')} batches …`);
+  console.log(
+    `Filling ${LOTS.toLocaleString('en-US')} lots and ${BATCHES.toLocaleString('en-US')} batches …`,
+  );
   const filled = await fill(client);
   await client.end();
 
-  const server = spawn(process.execPath, ['node_modules/next/dist/bin/next', 'start', '-p', String(PORT)], { env: { ...process.env, DATABASE_URL: appUrl, DATABASE_OWNER_URL: ownerUrl, APP_URL: BASE, NODE_ENV: 'production', LOG_LEVEL: 'warn' }, stdio: ['ignore', 'ignore', 'inherit'] });
+  const server = spawn(process.execPath, ['node_modules/next/dist/bin/next', 'start', '-p', String(PORT)], {
+    env: {
+      ...process.env,
+      DATABASE_URL: appUrl,
+      DATABASE_OWNER_URL: ownerUrl,
+      APP_URL: BASE,
+      NODE_ENV: 'production',
+      LOG_LEVEL: 'warn',
+    },
+    stdio: ['ignore', 'ignore', 'inherit'],
+  });
   try {
     await untilUp();
-    const token = await encode({ token: { claims: { kind: 'person', userId: filled.userId, sessionVersion: 1, shopId: filled.shopId } }, secret: env.AUTH_SECRET, salt: COOKIE });
+    const token = await encode({
+      token: { claims: { kind: 'person', userId: filled.userId, sessionVersion: 1, shopId: filled.shopId } },
+      secret: env.AUTH_SECRET,
+      salt: COOKIE,
+    });
     const headers = { cookie: `${COOKIE}=${token}` };
     const barePage = await measure('bare dynamic page', `${BASE}/dev/bare`);
     const bareRoute = await measure('bare select 1 route', `${BASE}/api/dev/bare`);
@@ -50,8 +66,17 @@ async function main(): Promise<void> {
       await measure('GET /api/lots', `${BASE}/api/lots`, headers),
       await measure('search', `${BASE}/api/search?text=B-199`, headers),
     ];
-    const dispatched = await measureEach('dispatch, one after the other', await dispatches(appUrl, filled, { base: BASE, headers }));
-    print([[barePage, null], ...pages.map((one) => [one, barePage] as const), [bareRoute, null], ...lists.map((one) => [one, bareRoute] as const), [dispatched, bareRoute]]);
+    const dispatched = await measureEach(
+      'dispatch, one after the other',
+      await dispatches(appUrl, filled, { base: BASE, headers }),
+    );
+    print([
+      [barePage, null],
+      ...pages.map((one) => [one, barePage] as const),
+      [bareRoute, null],
+      ...lists.map((one) => [one, bareRoute] as const),
+      [dispatched, bareRoute],
+    ]);
   } finally {
     server.kill('SIGTERM');
     await dropDatabase(superUrl, DATABASE).catch(() => undefined);
@@ -59,10 +84,16 @@ async function main(): Promise<void> {
 }
 
 function print(rows: readonly (readonly [Measured, Measured | null])[]): void {
-  console.log(`${'what'.padEnd(32)}${'p50 ms'.padStart(9)}${'p95'.padStart(9)}${'p99'.padStart(9)}${'req/s'.padStart(9)}   p50 against bare`);
+  console.log(
+    `${'what'.padEnd(32)}${'p50 ms'.padStart(9)}${'p95'.padStart(9)}${'p99'.padStart(9)}${'req/s'.padStart(9)}   p50 against bare`,
+  );
   for (const [one, bare] of rows) {
-    const figures = [one.p50, one.p95, one.p99, one.perSecond].map((figure) => String(figure).padStart(9)).join('');
-    console.log(`${one.name.padEnd(32)}${figures}   ${bare ? `${(one.p50 / bare.p50).toFixed(2)} × ${bare.name}` : ''}`);
+    const figures = [one.p50, one.p95, one.p99, one.perSecond]
+      .map((figure) => String(figure).padStart(9))
+      .join('');
+    console.log(
+      `${one.name.padEnd(32)}${figures}   ${bare ? `${(one.p50 / bare.p50).toFixed(2)} × ${bare.name}` : ''}`,
+    );
   }
 }
 

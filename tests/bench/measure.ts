@@ -13,7 +13,11 @@ export interface Measured {
 }
 
 /** Loads one address with ten connections: a warm-up that is thrown away, then ten seconds that count. */
-export async function measure(name: string, url: string, headers: Record<string, string> = {}): Promise<Measured> {
+export async function measure(
+  name: string,
+  url: string,
+  headers: Record<string, string> = {},
+): Promise<Measured> {
   await load(url, headers, WARM_UP_S);
   const times = await load(url, headers, MEASURED_S);
   return { name, ...percentiles(times), perSecond: Math.round(times.length / MEASURED_S) };
@@ -28,7 +32,11 @@ export async function measureEach(name: string, calls: readonly (() => Promise<v
     await call();
     times.push(performance.now() - at);
   }
-  return { name, ...percentiles(times), perSecond: Math.round((1000 * times.length) / (performance.now() - began)) };
+  return {
+    name,
+    ...percentiles(times),
+    perSecond: Math.round((1000 * times.length) / (performance.now() - began)),
+  };
 }
 
 function load(url: string, headers: Record<string, string>, duration: number): Promise<number[]> {
@@ -36,7 +44,8 @@ function load(url: string, headers: Record<string, string>, duration: number): P
     const times: number[] = [];
     const run = autocannon({ url, headers, connections: CONNECTIONS, duration }, (error, result) => {
       if (error) reject(error instanceof Error ? error : new Error(String(error)));
-      else if (result.non2xx > 0 || result.errors > 0) reject(new Error(`${url}: ${result.non2xx} refused, ${result.errors} failed`));
+      else if (result.non2xx > 0 || result.errors > 0)
+        reject(new Error(`${url}: ${result.non2xx} refused, ${result.errors} failed`));
       else resolve(times);
     });
     run.on('response', (_client, _status, _bytes, ms) => times.push(ms));
@@ -45,6 +54,7 @@ function load(url: string, headers: Record<string, string>, duration: number): P
 
 function percentiles(times: readonly number[]): { p50: number; p95: number; p99: number } {
   const sorted = [...times].sort((a, b) => a - b);
-  const at = (share: number) => Math.round(10 * (sorted[Math.min(sorted.length - 1, Math.floor(sorted.length * share))] ?? 0)) / 10;
+  const at = (share: number) =>
+    Math.round(10 * (sorted[Math.min(sorted.length - 1, Math.floor(sorted.length * share))] ?? 0)) / 10;
   return { p50: at(0.5), p95: at(0.95), p99: at(0.99) };
 }

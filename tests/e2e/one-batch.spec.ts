@@ -10,7 +10,9 @@ const DESK = 'desk@sallowfinch.test';
  * The whole way of one batch, by three people with browsers of their own: made, built, dispatched, answered from the
  * mailed link on a phone, counted in on a tablet, proved by keyboard and signed. What each way cost the person is printed.
  */
-test('one batch goes out, is answered from the mailed link, comes back, is proved and signed for', async ({ person }) => {
+test('one batch goes out, is answered from the mailed link, comes back, is proved and signed for', async ({
+  person,
+}) => {
   test.setTimeout(300_000);
   const partNumber = `MC-9${String(Date.now()).slice(-6)}`;
   const lead = await person('Lead');
@@ -45,7 +47,8 @@ async function makePartAndLot(lead: Person, partNumber: string): Promise<void> {
   await lead.type(page.getByLabel('Thickness'), '0.063 in');
   await lead.type(page.getByLabel('Made in'), 'annealed');
   await lead.type(page.getByLabel('Must end in'), 'annealed');
-  if ((await page.getByLabel('Process', { exact: true }).count()) === 0) await lead.press(page.getByRole('button', { name: 'Add a step' }));
+  if ((await page.getByLabel('Process', { exact: true }).count()) === 0)
+    await lead.press(page.getByRole('button', { name: 'Add a step' }));
   await page.getByLabel('Process', { exact: true }).selectOption('passivation');
   await lead.type(page.getByLabel('Specification', { exact: true }), 'AMS 2700');
   await lead.type(page.getByLabel('Its revision'), 'F');
@@ -64,7 +67,10 @@ async function buildAndDispatch(lead: Person, partNumber: string): Promise<{ id:
   const { page } = lead;
   await lead.goTo('/batches/new?process=passivation&specification=AMS+2700&specificationRevision=F');
   // Other lots may wait for the same step; only ours goes along.
-  for (const row of await page.getByRole('row').filter({ has: page.getByRole('checkbox') }).all()) {
+  for (const row of await page
+    .getByRole('row')
+    .filter({ has: page.getByRole('checkbox') })
+    .all()) {
     const box = row.getByRole('checkbox');
     const isOurs = (await row.textContent())?.includes(partNumber) ?? false;
     if ((await box.isChecked()) !== isOurs) await lead.press(box);
@@ -95,11 +101,20 @@ async function answer(processor: Person, number: string): Promise<void> {
   await looksRight(page, 'processor-link-390');
   await processor.press(page.getByRole('button', { name: `Open ${number}` }));
   await page.waitForURL(/\/portal\/batches\//);
-  await page.getByRole('group', { name: 'When will they be done' }).getByRole('button').or(page.getByRole('group', { name: 'When will they be done' }).getByRole('radio')).first().click();
+  await page
+    .getByRole('group', { name: 'When will they be done' })
+    .getByRole('button')
+    .or(page.getByRole('group', { name: 'When will they be done' }).getByRole('radio'))
+    .first()
+    .click();
   await looksRight(page, 'processor-first-390');
   await processor.press(page.getByRole('button', { name: new RegExp(`^I have ${PIECES}`) }));
   await processor.sees(page.getByText(`You have ${PIECES} pieces`));
-  await sendPaper(processor, 'Certificate', await somePaper('Certificate of conformance', `${number} passivation, ${PIECES} pieces`));
+  await sendPaper(
+    processor,
+    'Certificate',
+    await somePaper('Certificate of conformance', `${number} passivation, ${PIECES} pieces`),
+  );
   await sendPaper(processor, 'Invoice', await somePaper('Invoice', `${number}, ${PIECES} pieces at 5.00`));
   await looksRight(page, 'processor-papers-390');
 }
@@ -107,8 +122,13 @@ async function answer(processor: Person, number: string): Promise<void> {
 async function sendPaper(processor: Person, kind: string, content: Buffer): Promise<void> {
   const { page } = processor;
   await page.getByRole('group', { name: 'What do you send' }).getByText(kind, { exact: true }).click();
-  await page.locator('input[type=file]').first().setInputFiles({ name: `${kind.toLowerCase()}.pdf`, mimeType: 'application/pdf', buffer: content });
-  await processor.sees(page.getByRole('list', { name: 'Papers sent' }).getByText(`${kind.toLowerCase()}.pdf`));
+  await page
+    .locator('input[type=file]')
+    .first()
+    .setInputFiles({ name: `${kind.toLowerCase()}.pdf`, mimeType: 'application/pdf', buffer: content });
+  await processor.sees(
+    page.getByRole('list', { name: 'Papers sent' }).getByText(`${kind.toLowerCase()}.pdf`),
+  );
 }
 
 async function countIn(counter: Person, number: string): Promise<void> {
@@ -125,7 +145,9 @@ async function countIn(counter: Person, number: string): Promise<void> {
 
 async function prove(inspector: Person, batchId: string): Promise<void> {
   const { page } = inspector;
-  const { rows } = (await (await page.request.get(`/api/certificates?batchId=${batchId}`)).json()) as { rows: { id: string }[] };
+  const { rows } = (await (await page.request.get(`/api/certificates?batchId=${batchId}`)).json()) as {
+    rows: { id: string }[];
+  };
   await inspector.goTo(`/certificates/${rows[0]?.id ?? ''}`);
   await inspector.type(page.getByLabel('Certificate number'), 'SF-40117');
   await inspector.type(page.getByLabel('Date on it'), dayIn(0));
@@ -136,8 +158,11 @@ async function prove(inspector: Person, batchId: string): Promise<void> {
   await looksRight(page, 'prove-1440');
   await inspector.press(page.getByRole('button', { name: `Sign for ${PIECES} pieces` }));
   await inspector.type(page.getByLabel(/^Password of/), 'slipway-demo-1');
-  await inspector.press(page.getByRole('form', { name: 'Sign' }).getByRole('button', { name: `Sign for ${PIECES}` }));
+  await inspector.press(
+    page.getByRole('form', { name: 'Sign' }).getByRole('button', { name: `Sign for ${PIECES}` }),
+  );
   await inspector.sees(page.getByText(`Signed for ${PIECES}.`).first());
 }
 
-const dayIn = (days: number): string => new Date(Date.now() + days * 24 * 3600 * 1000).toISOString().slice(0, 10);
+const dayIn = (days: number): string =>
+  new Date(Date.now() + days * 24 * 3600 * 1000).toISOString().slice(0, 10);

@@ -11,14 +11,36 @@ import type { ToProve } from '@/lib/parts/to-prove';
 import { makeLot } from './lots';
 
 /** An approval for every process, from a year ago to a year ahead of the context's now. */
-export async function makeApproval(ctx: Ctx, processorId: string, given: Partial<typeof approvals.$inferInsert> = {}) {
+export async function makeApproval(
+  ctx: Ctx,
+  processorId: string,
+  given: Partial<typeof approvals.$inferInsert> = {},
+) {
   const today = calendarDay(ctx.now, 'UTC');
   const id = newId();
-  await ctx.tx.insert(approvals).values({ id, shopId: shopOf(ctx), processorId, reference: `AP-${id.slice(-4)}`, processes: [...PROCESSES], validFrom: addDays(today, -365), validTo: addDays(today, 365), createdAt: ctx.now, ...given });
+  await ctx.tx
+    .insert(approvals)
+    .values({
+      id,
+      shopId: shopOf(ctx),
+      processorId,
+      reference: `AP-${id.slice(-4)}`,
+      processes: [...PROCESSES],
+      validFrom: addDays(today, -365),
+      validTo: addDays(today, 365),
+      createdAt: ctx.now,
+      ...given,
+    });
   return id;
 }
 
-const hardness: ToProve = { characteristic: 'Hardness', limit: '63 to 83', unit: 'HRB', source: 'specification', sourceText: 'AMS 2658' };
+const hardness: ToProve = {
+  characteristic: 'Hardness',
+  limit: '63 to 83',
+  unit: 'HRB',
+  source: 'specification',
+  sourceText: 'AMS 2658',
+};
 
 interface Given {
   /** Pieces of each lot; a line each. */
@@ -36,11 +58,22 @@ export async function makeBatch(ctx: Ctx, processorId: string, given: Given = {}
   if (!given.lots) for (const pieces of given.pieces ?? [10]) lots.push(await makeLot(ctx, { pieces }));
   const created = await createBatch(ctx, {
     processorId,
-    lines: lots.map((lot) => ({ lotId: lot.id, stepId: lot.stepId, pieces: lot.pieces, unitPriceMinor: given.unitPriceMinor ?? 500 })),
-    wantedBackOn: given.wantedBackOn === undefined ? addDays(calendarDay(ctx.now, 'UTC'), 14) : given.wantedBackOn,
+    lines: lots.map((lot) => ({
+      lotId: lot.id,
+      stepId: lot.stepId,
+      pieces: lot.pieces,
+      unitPriceMinor: given.unitPriceMinor ?? 500,
+    })),
+    wantedBackOn:
+      given.wantedBackOn === undefined ? addDays(calendarDay(ctx.now, 'UTC'), 14) : given.wantedBackOn,
     ...(given.lotMinimumMinor === undefined ? {} : { lotMinimumMinor: given.lotMinimumMinor }),
   });
-  const batch = await setRequirements(ctx, { batchId: created.id, version: created.version, lineId: null, requirements: [...(given.requirements ?? [hardness])] });
+  const batch = await setRequirements(ctx, {
+    batchId: created.id,
+    version: created.version,
+    lineId: null,
+    requirements: [...(given.requirements ?? [hardness])],
+  });
   return { ...batch, lots };
 }
 

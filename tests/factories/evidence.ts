@@ -23,35 +23,84 @@ const passwordHash = hash(PASSWORD, { memoryCost: 8, timeCost: 1, parallelism: 1
 
 /** Gives a person the password that tests sign with. */
 export async function givePassword(owner: Db, userId: string): Promise<void> {
-  await owner.update(users).set({ passwordHash: await passwordHash }).where(eq(users.id, userId));
+  await owner
+    .update(users)
+    .set({ passwordHash: await passwordHash })
+    .where(eq(users.id, userId));
 }
 
 /** The record of a file that arrived whole; its bytes are nobody's concern here. */
-export async function makeFile(ctx: Ctx, given: { purpose: FilePurpose; batchId?: string; state?: FileState; content?: string }): Promise<string> {
+export async function makeFile(
+  ctx: Ctx,
+  given: { purpose: FilePurpose; batchId?: string; state?: FileState; content?: string },
+): Promise<string> {
   const id = newId();
-  const sha256 = createHash('sha256').update(given.content ?? id).digest('hex');
-  await ctx.tx.insert(files).values({ id, shopId: shopOf(ctx), batchId: given.batchId ?? null, purpose: given.purpose, name: `${id.slice(-4)}.pdf`, mediaType: 'application/pdf', size: 100, sha256, storageKey: `files/${id}`, state: given.state ?? 'verified', uploadedBy: 'Test Person', createdAt: ctx.now });
+  const sha256 = createHash('sha256')
+    .update(given.content ?? id)
+    .digest('hex');
+  await ctx.tx
+    .insert(files)
+    .values({
+      id,
+      shopId: shopOf(ctx),
+      batchId: given.batchId ?? null,
+      purpose: given.purpose,
+      name: `${id.slice(-4)}.pdf`,
+      mediaType: 'application/pdf',
+      size: 100,
+      sha256,
+      storageKey: `files/${id}`,
+      state: given.state ?? 'verified',
+      uploadedBy: 'Test Person',
+      createdAt: ctx.now,
+    });
   return id;
 }
 
 /** Counts in what is given for each line, in the order of the lines. */
-export async function countInAll(ctx: Ctx, batchId: string, counts: readonly { good?: number; damaged?: number; short?: number; over?: number }[]) {
+export async function countInAll(
+  ctx: Ctx,
+  batchId: string,
+  counts: readonly { good?: number; damaged?: number; short?: number; over?: number }[],
+) {
   const { lines } = await getReceiving(ctx, { batchId });
   const counted = counts.map((count, at) => {
     const line = lines[at];
     if (!line) throw new Error('more counts than lines');
     const { good = 0, damaged = 0, short = 0, over = 0 } = count;
     const names = line.serialised ? line.awayPieces.map((piece) => piece.id) : [];
-    return { lineId: line.id, good, damaged, short, over, note: '', goodPieceIds: names.slice(0, good), damagedPieceIds: names.slice(good, good + damaged) };
+    return {
+      lineId: line.id,
+      good,
+      damaged,
+      short,
+      over,
+      note: '',
+      goodPieceIds: names.slice(0, good),
+      damagedPieceIds: names.slice(good, good + damaged),
+    };
   });
   return countIn(ctx, { batchId, note: '', lines: counted, photos: [] });
 }
 
 /** A certificate whose number and date are entered. */
-export async function makeCertificate(ctx: Ctx, batchId: string, given: { number?: string; content?: string } = {}): Promise<string> {
-  const fileId = await makeFile(ctx, { purpose: 'certificate', batchId, ...(given.content === undefined ? {} : { content: given.content }) });
+export async function makeCertificate(
+  ctx: Ctx,
+  batchId: string,
+  given: { number?: string; content?: string } = {},
+): Promise<string> {
+  const fileId = await makeFile(ctx, {
+    purpose: 'certificate',
+    batchId,
+    ...(given.content === undefined ? {} : { content: given.content }),
+  });
   const { id } = await addCertificate(ctx, { batchId, fileId });
-  await recordCertificate(ctx, { certificateId: id, version: 1, number: given.number ?? `C-${id.slice(-6)}`, datedOn: '2026-06-15' });
+  await recordCertificate(ctx, {
+    certificateId: id,
+    version: 1,
+    number: given.number ?? `C-${id.slice(-6)}`,
+    datedOn: '2026-06-15',
+  });
   return id;
 }
 
@@ -59,15 +108,27 @@ export async function makeCertificate(ctx: Ctx, batchId: string, given: { number
 export async function decideAll(ctx: Ctx, certificateId: string): Promise<void> {
   const { requirements } = await getCertificate(ctx, { certificateId });
   for (const { id, decision } of requirements) {
-    await decideRequirement(ctx, { certificateId, requirementId: id, version: decision?.version ?? null, stated: 'as ordered', verdict: 'meets', overrideReason: null, note: '' });
+    await decideRequirement(ctx, {
+      certificateId,
+      requirementId: id,
+      version: decision?.version ?? null,
+      stated: 'as ordered',
+      verdict: 'meets',
+      overrideReason: null,
+      note: '',
+    });
   }
 }
 
 /** What a screen would send to sign for these pieces, in the order of the lines. */
 export async function signingInput(ctx: Ctx, certificateId: string, pieces: readonly number[]) {
   const { certificate, lines, requirements } = await getCertificate(ctx, { certificateId });
-  const coverage = pieces.flatMap((count, at) => (count > 0 && lines[at] ? [{ lineId: lines[at].id, pieces: count }] : []));
-  const decisions = requirements.flatMap(({ id, decision }) => (decision ? [{ requirementId: id, version: decision.version }] : []));
+  const coverage = pieces.flatMap((count, at) =>
+    count > 0 && lines[at] ? [{ lineId: lines[at].id, pieces: count }] : [],
+  );
+  const decisions = requirements.flatMap(({ id, decision }) =>
+    decision ? [{ requirementId: id, version: decision.version }] : [],
+  );
   return { certificateId, version: certificate.version, coverage, decisions, password: PASSWORD };
 }
 
@@ -78,4 +139,5 @@ export async function makeSignedCertificate(ctx: Ctx, batchId: string, pieces: r
   return { certificateId, ...(await signCertificate(ctx, await signingInput(ctx, certificateId, pieces))) };
 }
 
-export const certificateOf = async (ctx: Ctx, certificateId: string) => (await ctx.tx.select().from(certificates).where(eq(certificates.id, certificateId)))[0];
+export const certificateOf = async (ctx: Ctx, certificateId: string) =>
+  (await ctx.tx.select().from(certificates).where(eq(certificates.id, certificateId)))[0];

@@ -30,7 +30,11 @@ export async function makeProvedBatch(world: World, owner: Db, given: Given = {}
   await givePassword(owner, world.userId);
   return world.as(ALL, async (ctx) => {
     const lot = await makeLot(ctx, { pieces });
-    const batch = await makeDispatchedBatch(ctx, world.processorId, { lots: [lot], unitPriceMinor, ...(given.lotMinimumMinor === undefined ? {} : { lotMinimumMinor: given.lotMinimumMinor }) });
+    const batch = await makeDispatchedBatch(ctx, world.processorId, {
+      lots: [lot],
+      unitPriceMinor,
+      ...(given.lotMinimumMinor === undefined ? {} : { lotMinimumMinor: given.lotMinimumMinor }),
+    });
     await countInAll(ctx, batch.id, [{ good: pieces }]);
     await makeSignedCertificate(ctx, batch.id, [given.accepted ?? pieces]);
     return batch;
@@ -45,13 +49,40 @@ export const takeUp = (world: World, batchId: string) =>
     return { invoiceId: id, lineId: order.lines[0]?.lineId ?? '' };
   });
 
-export const pieceLine = (lineId: string, pieces: number, unitPriceMinor: number): InvoiceLineInput => ({ kind: 'pieces', lineId, description: 'Rib clip', pieces, unitPriceMinor, amountMinor: pieces * unitPriceMinor });
-export const charge = (kind: InvoiceLineInput['kind'], amountMinor: number): InvoiceLineInput => ({ kind, lineId: null, description: kind, pieces: null, unitPriceMinor: null, amountMinor });
+export const pieceLine = (lineId: string, pieces: number, unitPriceMinor: number): InvoiceLineInput => ({
+  kind: 'pieces',
+  lineId,
+  description: 'Rib clip',
+  pieces,
+  unitPriceMinor,
+  amountMinor: pieces * unitPriceMinor,
+});
+export const charge = (kind: InvoiceLineInput['kind'], amountMinor: number): InvoiceLineInput => ({
+  kind,
+  lineId: null,
+  description: kind,
+  pieces: null,
+  unitPriceMinor: null,
+  amountMinor,
+});
 
 /** What the office types of an invoice with these lines. */
-export function entering(invoiceId: string, lines: InvoiceLineInput[], given: { number?: string; version?: number; totalMinor?: number } = {}) {
+export function entering(
+  invoiceId: string,
+  lines: InvoiceLineInput[],
+  given: { number?: string; version?: number; totalMinor?: number } = {},
+) {
   const { number = `INV-${invoiceId.slice(-8)}`, version = 1 } = given;
-  return { invoiceId, version, number, datedOn: '2026-06-16', dueOn: '2026-07-16', currency: 'USD' as const, totalMinor: given.totalMinor ?? lines.reduce((sum, line) => sum + line.amountMinor, 0), lines };
+  return {
+    invoiceId,
+    version,
+    number,
+    datedOn: '2026-06-16',
+    dueOn: '2026-07-16',
+    currency: 'USD' as const,
+    totalMinor: given.totalMinor ?? lines.reduce((sum, line) => sum + line.amountMinor, 0),
+    lines,
+  };
 }
 
 /** A proved batch with an invoice that agrees, approved by the world's person. */
@@ -69,10 +100,23 @@ export async function makeApprovedInvoice(world: World, owner: Db, given: Given 
 /** Another person of the same shop. */
 export async function makeColleague(world: World, owner: Db) {
   const userId = newId();
-  await owner.insert(users).values({ id: userId, email: `person-${userId}@shop.test`, name: 'Second Person', createdAt: TODAY });
+  await owner
+    .insert(users)
+    .values({ id: userId, email: `person-${userId}@shop.test`, name: 'Second Person', createdAt: TODAY });
   await owner.insert(memberships).values({ userId, shopId: world.shopId, roles: [...ALL], createdAt: TODAY });
-  return { userId, as: <T>(roles: Parameters<World['as']>[0], work: (ctx: Ctx) => Promise<T>) => world.as(roles, (ctx) => work({ ...ctx, actor: { kind: 'person', userId, name: 'Second Person', roles } })) };
+  return {
+    userId,
+    as: <T>(roles: Parameters<World['as']>[0], work: (ctx: Ctx) => Promise<T>) =>
+      world.as(roles, (ctx) =>
+        work({ ...ctx, actor: { kind: 'person', userId, name: 'Second Person', roles } }),
+      ),
+  };
 }
 
-export const changeShop = (owner: Db, { shopId }: World, set: Partial<typeof shops.$inferInsert>) => owner.update(shops).set(set).where(eq(shops.id, shopId));
-export const changeProcessor = (owner: Db, { processorId }: World, set: Partial<typeof processors.$inferInsert>) => owner.update(processors).set(set).where(eq(processors.id, processorId));
+export const changeShop = (owner: Db, { shopId }: World, set: Partial<typeof shops.$inferInsert>) =>
+  owner.update(shops).set(set).where(eq(shops.id, shopId));
+export const changeProcessor = (
+  owner: Db,
+  { processorId }: World,
+  set: Partial<typeof processors.$inferInsert>,
+) => owner.update(processors).set(set).where(eq(processors.id, processorId));

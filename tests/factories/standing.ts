@@ -23,6 +23,11 @@ export async function stageNow(ctx: Ctx, batchId: string) {
 
 /** The last thing the audit trail says of an action, or undefined. */
 export async function lastAudit(ctx: Ctx, action: string) {
-  const [entry] = await ctx.tx.select().from(auditEntries).where(eq(auditEntries.action, action)).orderBy(sql`seq desc`).limit(1);
+  const [entry] = await ctx.tx
+    .select()
+    .from(auditEntries)
+    .where(eq(auditEntries.action, action))
+    .orderBy(sql`seq desc`)
+    .limit(1);
   return entry;
 }

@@ -17,14 +17,26 @@ export interface Sent {
   batchId?: string;
 }
 
-export const PDF = Buffer.from('%PDF-1.7\n1 0 obj <</Type /Catalog>> endobj\ntrailer <</Root 1 0 R>>\n%%EOF\n');
-export const PNG = Buffer.from('iVBORw0KGgoAAAANSUhEUgAAAAEAAAABCAYAAAAfFcSJAAAADUlEQVR42mNk+M9QDwADhgGAWjR9awAAAABJRU5ErkJggg==', 'base64');
+export const PDF = Buffer.from(
+  '%PDF-1.7\n1 0 obj <</Type /Catalog>> endobj\ntrailer <</Root 1 0 R>>\n%%EOF\n',
+);
+export const PNG = Buffer.from(
+  'iVBORw0KGgoAAAANSUhEUgAAAAEAAAABCAYAAAAfFcSJAAAADUlEQVR42mNk+M9QDwADhgGAWjR9awAAAABJRU5ErkJggg==',
+  'base64',
+);
 
 /** A PDF like no other, so that tests do not meet each other's. */
 export const somePdf = (words: string): Buffer => Buffer.concat([PDF, Buffer.from(`% ${words}\n`)]);
 
 export const announceUpload = (as: As, { content, ...file }: Sent) =>
-  as((ctx) => requestUpload(ctx, { mediaType: '', ...file, size: content.length, sha256: createHash('sha256').update(content).digest('hex') }));
+  as((ctx) =>
+    requestUpload(ctx, {
+      mediaType: '',
+      ...file,
+      size: content.length,
+      sha256: createHash('sha256').update(content).digest('hex'),
+    }),
+  );
 
 /** Runs an endpoint in its steps, as `serve` does. */
 export async function inSteps(as: As, endpoint: Endpoint, input: Record<string, unknown>): Promise<unknown> {
@@ -33,12 +45,15 @@ export async function inSteps(as: As, endpoint: Endpoint, input: Record<string, 
   return as((ctx) => endpoint.run(ctx, input, found));
 }
 
-export const complete = (as: As, fileId: string): Promise<unknown> => inSteps(as, completeUploadEndpoint as unknown as Endpoint, { fileId });
+export const complete = (as: As, fileId: string): Promise<unknown> =>
+  inSteps(as, completeUploadEndpoint as unknown as Endpoint, { fileId });
 
 /** A file sent and verified, all the way through storage. The address is good for ten real minutes: open `as` with the real time. */
 export async function uploadFile(as: As, sent: Sent): Promise<string> {
   const { file, upload } = await announceUpload(as, sent);
-  const answer = upload && (await fetch(upload.url, { method: 'PUT', headers: upload.headers, body: new Uint8Array(sent.content) }));
+  const answer =
+    upload &&
+    (await fetch(upload.url, { method: 'PUT', headers: upload.headers, body: new Uint8Array(sent.content) }));
   if (answer && !answer.ok) throw new Error(`storage answered ${answer.status}: ${await answer.text()}`);
   await complete(as, file.id);
   return file.id;

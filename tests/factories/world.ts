@@ -26,12 +26,35 @@ export interface World {
  */
 export async function makeWorld(db: Db, owner: Db): Promise<World> {
   const [shopId, processorId, userId, portalUserId] = [newId(), newId(), newId(), newId()];
-  await owner.insert(shops).values({ id: shopId, name: `Shop ${shopId.slice(-6)}`, zone: 'UTC', currency: 'USD', orderPrefix: 'TP', createdAt: TODAY });
-  await owner.insert(processors).values({ id: processorId, name: `Processor ${processorId.slice(-6)}`, email: `desk-${processorId}@processor.test`, createdAt: TODAY });
-  await owner.insert(shopProcessors).values({ shopId, processorId, contactEmail: `desk-${processorId}@processor.test`, createdAt: TODAY });
+  await owner
+    .insert(shops)
+    .values({
+      id: shopId,
+      name: `Shop ${shopId.slice(-6)}`,
+      zone: 'UTC',
+      currency: 'USD',
+      orderPrefix: 'TP',
+      createdAt: TODAY,
+    });
+  await owner
+    .insert(processors)
+    .values({
+      id: processorId,
+      name: `Processor ${processorId.slice(-6)}`,
+      email: `desk-${processorId}@processor.test`,
+      createdAt: TODAY,
+    });
+  await owner
+    .insert(shopProcessors)
+    .values({ shopId, processorId, contactEmail: `desk-${processorId}@processor.test`, createdAt: TODAY });
   await owner.insert(users).values([
     { id: userId, email: `person-${userId}@shop.test`, name: 'Test Person', createdAt: TODAY },
-    { id: portalUserId, email: `person-${portalUserId}@processor.test`, name: 'Test Processor', createdAt: TODAY },
+    {
+      id: portalUserId,
+      email: `person-${portalUserId}@processor.test`,
+      name: 'Test Processor',
+      createdAt: TODAY,
+    },
   ]);
   await owner.insert(memberships).values([
     { userId, shopId, roles: ['lead', 'inspector', 'office', 'admin'], createdAt: TODAY },
@@ -39,18 +62,33 @@ export async function makeWorld(db: Db, owner: Db): Promise<World> {
   ]);
 
   const within = <T>(tenant: Tenant, actor: Ctx['actor'], work: (ctx: Ctx) => Promise<T>, now: Date) =>
-    withTenant(db, tenant, (tx: Tx) => work({ tenant, actor, tx, now, requestId: newId(), address: '127.0.0.1' }));
+    withTenant(db, tenant, (tx: Tx) =>
+      work({ tenant, actor, tx, now, requestId: newId(), address: '127.0.0.1' }),
+    );
 
   return {
     db,
     shopId,
     processorId,
     userId,
-    as: (roles, work, now = TODAY) => within({ kind: 'shop', shopId, personId: userId }, { kind: 'person', userId, name: 'Test Person', roles: roles as readonly Role[] }, work, now),
+    as: (roles, work, now = TODAY) =>
+      within(
+        { kind: 'shop', shopId, personId: userId },
+        { kind: 'person', userId, name: 'Test Person', roles: roles as readonly Role[] },
+        work,
+        now,
+      ),
     asProcessor: (work, batchId, now = TODAY) =>
       within(
-        { kind: 'processor', processorId, batchId: batchId ?? null, personId: batchId === undefined ? portalUserId : null },
-        batchId === undefined ? { kind: 'person', userId: portalUserId, name: 'Test Processor', roles: ['processor'] } : { kind: 'link', linkId: newId(), name: 'Test Processor', roles: ['processor'] },
+        {
+          kind: 'processor',
+          processorId,
+          batchId: batchId ?? null,
+          personId: batchId === undefined ? portalUserId : null,
+        },
+        batchId === undefined
+          ? { kind: 'person', userId: portalUserId, name: 'Test Processor', roles: ['processor'] }
+          : { kind: 'link', linkId: newId(), name: 'Test Processor', roles: ['processor'] },
         work,
         now,
       ),

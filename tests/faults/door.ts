@@ -28,8 +28,12 @@ async function answer(incoming: IncomingMessage): Promise<Response> {
     const found = pattern.exec(url.pathname);
     if (!found || method !== incoming.method) continue;
     const body = method === 'GET' ? undefined : new Uint8Array(await buffer(incoming));
-    const headers = Object.entries(incoming.headers).flatMap(([name, value]): [string, string][] => (value === undefined ? [] : [[name, [value].flat().join(', ')]]));
-    return handle(new Request(url, { method, headers, ...(body === undefined ? {} : { body }) }), { params: Promise.resolve({ ...found.groups }) });
+    const headers = Object.entries(incoming.headers).flatMap(([name, value]): [string, string][] =>
+      value === undefined ? [] : [[name, [value].flat().join(', ')]],
+    );
+    return handle(new Request(url, { method, headers, ...(body === undefined ? {} : { body }) }), {
+      params: Promise.resolve({ ...found.groups }),
+    });
   }
   return Response.json({ title: 'no such route' }, { status: 404 });
 }

@@ -6,7 +6,17 @@ import { build } from 'esbuild';
 /** Bundles an entry of ours into one file, packages left outside, so that a killed process is up again in a second. */
 export async function bundle(entry: string, name: string): Promise<string> {
   const outfile = `.data/test/faults/${name}.mjs`;
-  await build({ entryPoints: [entry], outfile, bundle: true, platform: 'node', format: 'esm', target: 'node20', packages: 'external', jsx: 'automatic', logLevel: 'error' });
+  await build({
+    entryPoints: [entry],
+    outfile,
+    bundle: true,
+    platform: 'node',
+    format: 'esm',
+    target: 'node20',
+    packages: 'external',
+    jsx: 'automatic',
+    logLevel: 'error',
+  });
   return outfile;
 }
 
@@ -22,9 +32,18 @@ export class Killable {
   ) {}
 
   async start(): Promise<void> {
-    this.child = spawn(process.execPath, [this.script, ...this.args], { env: { ...process.env, ...this.env }, stdio: ['ignore', 'ignore', 'inherit'] });
-    for (const deadline = Date.now() + 30_000; Date.now() < deadline; ) {
-      if (await fetch(this.health).then((response) => response.ok, () => false)) return;
+    this.child = spawn(process.execPath, [this.script, ...this.args], {
+      env: { ...process.env, ...this.env },
+      stdio: ['ignore', 'ignore', 'inherit'],
+    });
+    for (const deadline = Date.now() + 30_000; Date.now() < deadline;) {
+      if (
+        await fetch(this.health).then(
+          (response) => response.ok,
+          () => false,
+        )
+      )
+        return;
       await new Promise((resolve) => setTimeout(resolve, 25));
     }
     throw new Error(`${this.script} did not come up`);

@@ -24,8 +24,19 @@ export function openSetting(): Setting {
   beforeAll(async () => {
     const database = await makeDatabase();
     const [app, owner] = [connect(database.appUrl), connect(database.ownerUrl, 4)];
-    const settings = { DATABASE_URL: database.appUrl, DATABASE_OWNER_URL: database.ownerUrl, APP_URL: DOOR, LOG_LEVEL: 'silent', NODE_ENV: 'production' };
-    const door = new Killable(await bundle('tests/faults/door.ts', 'door'), [String(DOOR_PORT)], settings, `${DOOR}/api/health`);
+    const settings = {
+      DATABASE_URL: database.appUrl,
+      DATABASE_OWNER_URL: database.ownerUrl,
+      APP_URL: DOOR,
+      LOG_LEVEL: 'silent',
+      NODE_ENV: 'production',
+    };
+    const door = new Killable(
+      await bundle('tests/faults/door.ts', 'door'),
+      [String(DOOR_PORT)],
+      settings,
+      `${DOOR}/api/health`,
+    );
     Object.assign(setting, { db: app.db, owner: owner.db, door });
     await door.start();
     close = async () => {
@@ -40,7 +51,11 @@ export function openSetting(): Setting {
 
 /** The cookie that the browser of a person of the shop would send. */
 export async function cookieOf(userId: string, shopId: string): Promise<string> {
-  const token = await encode({ token: { claims: { kind: 'person', userId, sessionVersion: 1, shopId } }, secret: env.AUTH_SECRET, salt: COOKIE });
+  const token = await encode({
+    token: { claims: { kind: 'person', userId, sessionVersion: 1, shopId } },
+    secret: env.AUTH_SECRET,
+    salt: COOKIE,
+  });
   return `${COOKIE}=${token}`;
 }
 
@@ -53,9 +68,18 @@ interface Asked {
 }
 
 /** One try; null where the answer was lost with the process. */
-export async function tryOnce({ path, cookie, key, body }: Asked): Promise<{ status: number; body: unknown } | null> {
+export async function tryOnce({
+  path,
+  cookie,
+  key,
+  body,
+}: Asked): Promise<{ status: number; body: unknown } | null> {
   try {
-    const response = await fetch(`${DOOR}/api${path}`, { method: 'POST', headers: { cookie, 'content-type': 'application/json', 'idempotency-key': key }, body: JSON.stringify(body) });
+    const response = await fetch(`${DOOR}/api${path}`, {
+      method: 'POST',
+      headers: { cookie, 'content-type': 'application/json', 'idempotency-key': key },
+      body: JSON.stringify(body),
+    });
     return { status: response.status, body: await response.json() };
   } catch {
     return null;
@@ -63,7 +87,10 @@ export async function tryOnce({ path, cookie, key, body }: Asked): Promise<{ sta
 }
 
 /** What a browser does after a lost answer: the same call with the same key, until there is one. */
-export async function tryUntilAnswered(setting: Setting, asked: Asked): Promise<{ status: number; body: unknown }> {
+export async function tryUntilAnswered(
+  setting: Setting,
+  asked: Asked,
+): Promise<{ status: number; body: unknown }> {
   for (let tries = 0; tries < 5; tries++) {
     await setting.door.kill();
     await setting.door.start();

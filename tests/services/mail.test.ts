@@ -33,11 +33,16 @@ const someMail = (changes: Partial<Mail> = {}): Mail => ({
 });
 
 async function inbox(to: string): Promise<StoredMessage[]> {
-  return (await (await fetch(`${server.address}/messages?to=${encodeURIComponent(to)}`)).json()) as StoredMessage[];
+  return (await (
+    await fetch(`${server.address}/messages?to=${encodeURIComponent(to)}`)
+  ).json()) as StoredMessage[];
 }
 
 async function fail(mode: string): Promise<void> {
-  const answer = await fetch(`${server.address}/control`, { method: 'POST', body: JSON.stringify({ fail: mode }) });
+  const answer = await fetch(`${server.address}/control`, {
+    method: 'POST',
+    body: JSON.stringify({ fail: mode }),
+  });
   expect(answer.status).toBe(200);
 }
 
@@ -63,12 +68,26 @@ describe('a mail that is sent', () => {
   });
 
   test('brings its attachments byte for byte', async () => {
-    const content = Buffer.from([0, 255, 10, 13, 13, 10, 46, 10, ...Array.from({ length: 5000 }, (_, at) => at % 256)]);
-    const mail = someMail({ attachments: [{ fileName: 'Traveller B-0404 é.pdf', mediaType: 'application/pdf', content }] });
+    const content = Buffer.from([
+      0,
+      255,
+      10,
+      13,
+      13,
+      10,
+      46,
+      10,
+      ...Array.from({ length: 5000 }, (_, at) => at % 256),
+    ]);
+    const mail = someMail({
+      attachments: [{ fileName: 'Traveller B-0404 é.pdf', mediaType: 'application/pdf', content }],
+    });
     await sendMail(mail, transport);
 
     const [message] = await inbox(addressOf(mail));
-    expect(message?.attachments).toMatchObject([{ fileName: 'Traveller B-0404 é.pdf', mediaType: 'application/pdf', sizeBytes: content.length }]);
+    expect(message?.attachments).toMatchObject([
+      { fileName: 'Traveller B-0404 é.pdf', mediaType: 'application/pdf', sizeBytes: content.length },
+    ]);
     const fetched = await fetch(`${server.address}/messages/${message?.id}/attachments/0`);
     expect(Buffer.from(await fetched.arrayBuffer()).equals(content)).toBe(true);
   });
@@ -84,7 +103,9 @@ describe('a mail that is sent', () => {
     await sendMail(mail, transport);
     const second = await startMailServer({ smtpPort: 0, httpPort: 0, dir });
     try {
-      const found = (await (await fetch(`${second.address}/messages?to=${addressOf(mail)}`)).json()) as StoredMessage[];
+      const found = (await (
+        await fetch(`${second.address}/messages?to=${addressOf(mail)}`)
+      ).json()) as StoredMessage[];
       expect(found).toHaveLength(1);
     } finally {
       await second.close();
@@ -130,7 +151,10 @@ describe('a mail server in trouble', () => {
   });
 
   test('is not told to fail in a way it does not know', async () => {
-    const answer = await fetch(`${server.address}/control`, { method: 'POST', body: JSON.stringify({ fail: 'sometimes' }) });
+    const answer = await fetch(`${server.address}/control`, {
+      method: 'POST',
+      body: JSON.stringify({ fail: 'sometimes' }),
+    });
     expect(answer.status).toBe(400);
   });
 });
@@ -140,7 +164,9 @@ describe('the inbox page', () => {
     const mail = someMail({
       subject: '<script>alert(1)</script>',
       html: '<p>Hi</p><img src="cid:logo"><script>alert(2)</script>',
-      attachments: [{ fileName: 'logo.png', mediaType: 'image/png', content: Buffer.from('png'), contentId: 'logo' }],
+      attachments: [
+        { fileName: 'logo.png', mediaType: 'image/png', content: Buffer.from('png'), contentId: 'logo' },
+      ],
     });
     await sendMail(mail, transport);
     const [message] = await inbox(addressOf(mail));

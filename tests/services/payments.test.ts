@@ -74,7 +74,10 @@ async function start(): Promise<void> {
 }
 
 async function control(action: string, body: object): Promise<Record<string, unknown>> {
-  const answer = await fetch(`${server.address}/control/${action}`, { method: 'POST', body: JSON.stringify(body) });
+  const answer = await fetch(`${server.address}/control/${action}`, {
+    method: 'POST',
+    body: JSON.stringify(body),
+  });
   expect(answer.status).toBe(200);
   return (await answer.json()) as Record<string, unknown>;
 }
@@ -94,14 +97,23 @@ const notices = (): PaymentNotice[] =>
 
 /** The states of one payment in the order in which the shop heard of them. */
 const heardOf = (intentId: string) =>
-  notices().flatMap((notice) => (notice.about === 'payment' && notice.intentId === intentId ? [notice.state] : []));
+  notices().flatMap((notice) =>
+    notice.about === 'payment' && notice.intentId === intentId ? [notice.state] : [],
+  );
 
 async function processor({ isOnboarded = true } = {}): Promise<string> {
   const account = await createConnectedAccount(
     { name: 'Cedar Hollow Plating', email: 'desk@processor.test', country: 'US', processorId: randomUUID() },
     stripe,
   );
-  if (isOnboarded) await visit(await createOnboardingLink({ account, returnUrl: 'http://localhost:5600/back', refreshUrl: 'http://localhost:5600/again' }, stripe), ONBOARDING_FORM);
+  if (isOnboarded)
+    await visit(
+      await createOnboardingLink(
+        { account, returnUrl: 'http://localhost:5600/back', refreshUrl: 'http://localhost:5600/again' },
+        stripe,
+      ),
+      ONBOARDING_FORM,
+    );
   return account;
 }
 
@@ -115,7 +127,10 @@ async function visit(url: string, form: Record<string, string>): Promise<string 
 
 async function invoice(changes: Partial<InvoicePayment> & { method?: string } = {}): Promise<InvoicePayment> {
   const { method = 'pm_card_visa', ...rest } = changes;
-  const customer = await createCustomer({ name: 'Heron Slough Float Works', email: 'office@shop.test', shopId: randomUUID() }, stripe);
+  const customer = await createCustomer(
+    { name: 'Heron Slough Float Works', email: 'office@shop.test', shopId: randomUUID() },
+    stripe,
+  );
   return {
     amountMinor: 41_250,
     currency: 'USD',
@@ -138,7 +153,9 @@ describe('paying an invoice', () => {
     const paid = await payInvoiceIntent(payment, stripe);
     expect(paid.state).toBe('succeeded');
 
-    const intent = await stripe.paymentIntents.retrieve(paid.intentId, { expand: ['latest_charge.transfer'] });
+    const intent = await stripe.paymentIntents.retrieve(paid.intentId, {
+      expand: ['latest_charge.transfer'],
+    });
     expect(intent).toMatchObject({
       amount_received: 41_250,
       currency: 'usd',
@@ -146,7 +163,9 @@ describe('paying an invoice', () => {
     });
 
     await expect.poll(() => heardOf(paid.intentId), SOON).toEqual(['succeeded']);
-    expect(notices().find((notice) => notice.about === 'payment' && notice.intentId === paid.intentId)).toMatchObject({
+    expect(
+      notices().find((notice) => notice.about === 'payment' && notice.intentId === paid.intentId),
+    ).toMatchObject({
       amountMinor: 41_250,
       currency: 'USD',
       metadata: payment.metadata,
@@ -155,7 +174,10 @@ describe('paying an invoice', () => {
 
   test('twice with the same key pays once', async () => {
     const payment = await invoice();
-    const [first, second] = await Promise.all([payInvoiceIntent(payment, stripe), payInvoiceIntent(payment, stripe)]);
+    const [first, second] = await Promise.all([
+      payInvoiceIntent(payment, stripe),
+      payInvoiceIntent(payment, stripe),
+    ]);
     expect(second).toEqual(first);
     expect(await payInvoiceIntent(payment, stripe)).toEqual(first);
     expect(await countOfIntents(payment.customer)).toBe(1);
@@ -180,7 +202,9 @@ describe('paying an invoice', () => {
 
   test('whose key was refused for its parameters may be mended and sent again', async () => {
     const payment = await invoice();
-    await expect(payInvoiceIntent({ ...payment, amountMinor: 10 }, stripe)).rejects.toMatchObject({ code: 'amount_too_small' });
+    await expect(payInvoiceIntent({ ...payment, amountMinor: 10 }, stripe)).rejects.toMatchObject({
+      code: 'amount_too_small',
+    });
     expect(await payInvoiceIntent(payment, stripe)).toMatchObject({ state: 'succeeded' });
   });
 
@@ -210,11 +234,17 @@ describe('a payment that is declined', () => {
   test('can be paid with another card on the same intent, and only once', async () => {
     const payment = await invoice({ method: 'pm_card_chargeDeclined' });
     const { intentId } = await payInvoiceIntent(payment, stripe);
-    const paymentMethod = await savePaymentMethod({ customer: payment.customer, paymentMethod: 'pm_card_visa' }, stripe);
+    const paymentMethod = await savePaymentMethod(
+      { customer: payment.customer, paymentMethod: 'pm_card_visa' },
+      stripe,
+    );
 
-    const again = (key: string) => retryInvoiceIntent({ intentId, paymentMethod, idempotencyKey: key }, stripe);
+    const again = (key: string) =>
+      retryInvoiceIntent({ intentId, paymentMethod, idempotencyKey: key }, stripe);
     expect(await again('retry-1-' + intentId)).toEqual({ state: 'succeeded', intentId });
-    await expect(again('retry-2-' + intentId)).rejects.toMatchObject({ code: 'payment_intent_unexpected_state' });
+    await expect(again('retry-2-' + intentId)).rejects.toMatchObject({
+      code: 'payment_intent_unexpected_state',
+    });
     expect(await countOfIntents(payment.customer)).toBe(1);
   });
 });
@@ -231,9 +261,15 @@ describe('a payment that takes a while', () => {
     expect(attempt.state).toBe('processing');
     await control('settle', { payment_intent: attempt.intentId });
     await expect.poll(() => heardOf(attempt.intentId), SOON).toEqual(['processing', end]);
-    expect((await getPaymentIntent(attempt.intentId, stripe)).status).toBe(end === 'succeeded' ? 'succeeded' : 'requires_payment_method');
+    expect((await getPaymentIntent(attempt.intentId, stripe)).status).toBe(
+      end === 'succeeded' ? 'succeeded' : 'requires_payment_method',
+    );
     // One attempt is one charge, pending first and then what it became.
-    expect((await stripe.charges.list({ limit: 100 })).data.filter((charge) => charge.payment_intent === attempt.intentId)).toHaveLength(1);
+    expect(
+      (await stripe.charges.list({ limit: 100 })).data.filter(
+        (charge) => charge.payment_intent === attempt.intentId,
+      ),
+    ).toHaveLength(1);
   });
 
   test('is not forgotten when the service is killed and started again', async () => {
@@ -255,7 +291,12 @@ describe('a message to the shop', () => {
     await expect.poll(() => heardOf(intentId).length, SOON).toBeGreaterThan(1);
     shopAnswers = 200;
     await expect
-      .poll(async () => (await stripe.events.list({ limit: 100 })).data.filter((event) => event.pending_webhooks > 0).length, SOON)
+      .poll(
+        async () =>
+          (await stripe.events.list({ limit: 100 })).data.filter((event) => event.pending_webhooks > 0)
+            .length,
+        SOON,
+      )
       .toBe(0);
   });
 
@@ -277,37 +318,58 @@ describe('a message to the shop', () => {
     expect(heardOf(intentId)).toEqual(['succeeded', 'processing']);
   });
 
-  test.each(['wrong_secret', 'tampered', 'old', 'unsigned'])('with a signature that is %s is refused', async (how) => {
-    await payInvoiceIntent(await invoice(), stripe);
-    const { answer } = await control('forge', { how });
-    expect(answer).toBe('400');
-    const forged = received.filter((message) => !isGenuine(message));
-    expect(forged).toHaveLength(1);
-    expect(() => parseWebhook(forged[0]?.body ?? '', forged[0]?.signature ?? null, SECRET, stripe)).toThrow('does not belong');
-  });
+  test.each(['wrong_secret', 'tampered', 'old', 'unsigned'])(
+    'with a signature that is %s is refused',
+    async (how) => {
+      await payInvoiceIntent(await invoice(), stripe);
+      const { answer } = await control('forge', { how });
+      expect(answer).toBe('400');
+      const forged = received.filter((message) => !isGenuine(message));
+      expect(forged).toHaveLength(1);
+      expect(() => parseWebhook(forged[0]?.body ?? '', forged[0]?.signature ?? null, SECRET, stripe)).toThrow(
+        'does not belong',
+      );
+    },
+  );
 });
 
 describe('a processor', () => {
   test('cannot be paid before its account is complete, and can afterwards', async () => {
     const account = await processor({ isOnboarded: false });
     const payment = await invoice({ destinationAccount: account });
-    await expect(payInvoiceIntent(payment, stripe)).rejects.toMatchObject({ code: 'insufficient_capabilities_for_transfer' });
+    await expect(payInvoiceIntent(payment, stripe)).rejects.toMatchObject({
+      code: 'insufficient_capabilities_for_transfer',
+    });
 
-    const link = { account, returnUrl: 'http://localhost:5600/back', refreshUrl: 'http://localhost:5600/again' };
+    const link = {
+      account,
+      returnUrl: 'http://localhost:5600/back',
+      refreshUrl: 'http://localhost:5600/again',
+    };
     expect(await visit(await createOnboardingLink(link, stripe), ONBOARDING_FORM)).toBe(link.returnUrl);
-    await expect.poll(() => notices(), SOON).toContainEqual(expect.objectContaining({ about: 'account', accountId: account, canReceive: true }));
+    await expect
+      .poll(() => notices(), SOON)
+      .toContainEqual(expect.objectContaining({ about: 'account', accountId: account, canReceive: true }));
     expect(await payInvoiceIntent(payment, stripe)).toMatchObject({ state: 'succeeded' });
   });
 
   test('who opens a used link is sent to where a new one is made', async () => {
     const account = await processor({ isOnboarded: false });
-    const url = await createOnboardingLink({ account, returnUrl: 'http://localhost:5600/back', refreshUrl: 'http://localhost:5600/again' }, stripe);
+    const url = await createOnboardingLink(
+      { account, returnUrl: 'http://localhost:5600/back', refreshUrl: 'http://localhost:5600/again' },
+      stripe,
+    );
     await visit(url, ONBOARDING_FORM);
     expect(await visit(url, ONBOARDING_FORM)).toBe('http://localhost:5600/again');
   });
 
   test('is one account, however often it is made', async () => {
-    const same = { name: 'Alder Flat Heat Treating', email: 'a@processor.test', country: 'US', processorId: randomUUID() };
+    const same = {
+      name: 'Alder Flat Heat Treating',
+      email: 'a@processor.test',
+      country: 'US',
+      processorId: randomUUID(),
+    };
     expect(await createConnectedAccount(same, stripe)).toBe(await createConnectedAccount(same, stripe));
   });
 });
@@ -316,21 +378,29 @@ describe('a saved method', () => {
   test('comes from the hosted page by webhook, and pays', async () => {
     const payment = await invoice();
     const successUrl = 'http://localhost:5600/settings?session={CHECKOUT_SESSION_ID}';
-    const url = await createPaymentMethodLink({ customer: payment.customer, successUrl, cancelUrl: 'http://localhost:5600/settings' }, stripe);
+    const url = await createPaymentMethodLink(
+      { customer: payment.customer, successUrl, cancelUrl: 'http://localhost:5600/settings' },
+      stripe,
+    );
     expect(await visit(url, { method: 'pm_card_visa' })).toMatch(/settings\?session=cs_test_/);
     expect((await fetch(url)).status).toBe(410);
 
-    const saved = () => notices().find((notice) => notice.about === 'payment_method' && notice.customer === payment.customer);
+    const saved = () =>
+      notices().find((notice) => notice.about === 'payment_method' && notice.customer === payment.customer);
     await expect.poll(saved, SOON).toBeDefined();
     const notice = saved();
     const paymentMethod = notice?.about === 'payment_method' ? notice.paymentMethod : '';
-    expect(await payInvoiceIntent({ ...payment, paymentMethod }, stripe)).toMatchObject({ state: 'succeeded' });
+    expect(await payInvoiceIntent({ ...payment, paymentMethod }, stripe)).toMatchObject({
+      state: 'succeeded',
+    });
   });
 
   test('of another shop does not pay', async () => {
     const mine = await invoice();
     const theirs = await invoice();
-    await expect(payInvoiceIntent({ ...mine, paymentMethod: theirs.paymentMethod }, stripe)).rejects.toMatchObject({ param: 'payment_method' });
+    await expect(
+      payInvoiceIntent({ ...mine, paymentMethod: theirs.paymentMethod }, stripe),
+    ).rejects.toMatchObject({ param: 'payment_method' });
   });
 });
 
@@ -348,7 +418,10 @@ describe('a refund', () => {
 
     const [transfer] = (await stripe.transfers.list({ destination: payment.destinationAccount })).data;
     expect(transfer).toMatchObject({ amount_reversed: 41_250, reversed: true });
-    const refundsHeard = () => notices().flatMap((notice) => (notice.about === 'refund' && notice.intentId === intentId ? [notice.refundedMinor] : []));
+    const refundsHeard = () =>
+      notices().flatMap((notice) =>
+        notice.about === 'refund' && notice.intentId === intentId ? [notice.refundedMinor] : [],
+      );
     await expect.poll(refundsHeard, SOON).toEqual([1_250, 41_250]);
   });
 });
@@ -356,8 +429,14 @@ describe('a refund', () => {
 describe('the service', () => {
   test('refuses who has no key, unknown things, unknown parameters and unknown addresses', async () => {
     expect((await fetch(`${server.address}/v1/accounts`)).status).toBe(401);
-    await expect(stripe.accounts.retrieve('acct_nobody')).rejects.toMatchObject({ code: 'resource_missing', statusCode: 404 });
-    await expect(stripe.customers.create({ phone: '1' })).rejects.toMatchObject({ code: 'parameter_unknown', param: 'phone' });
+    await expect(stripe.accounts.retrieve('acct_nobody')).rejects.toMatchObject({
+      code: 'resource_missing',
+      statusCode: 404,
+    });
+    await expect(stripe.customers.create({ phone: '1' })).rejects.toMatchObject({
+      code: 'parameter_unknown',
+      param: 'phone',
+    });
     await expect(stripe.products.list()).rejects.toMatchObject({ statusCode: 404 });
   });
 

@@ -19,9 +19,16 @@ export async function runJobs(base: { db: Db; owner: Db }, job: Job): Promise<Ra
   const boss = queueOf(base.owner);
   const ran: Ran[] = [];
   for (;;) {
-    const [taken] = await boss.fetch<Record<string, unknown>>(job.name, { batchSize: 1, includeMetadata: true });
+    const [taken] = await boss.fetch<Record<string, unknown>>(job.name, {
+      batchSize: 1,
+      includeMetadata: true,
+    });
     if (!taken) return ran;
-    const error = await runJob(base.db, job, { data: taken.data, attempt: taken.retryCount + 1, id: taken.id }).then(
+    const error = await runJob(base.db, job, {
+      data: taken.data,
+      attempt: taken.retryCount + 1,
+      id: taken.id,
+    }).then(
       () => null,
       (reason: unknown) => (reason instanceof Error ? reason : new Error(String(reason))),
     );
@@ -34,5 +41,9 @@ export async function runJobs(base: { db: Db; owner: Db }, job: Job): Promise<Ra
 /** Never started: it only words the statements, which go over the owner's own connections. */
 function queueOf(owner: Db): PgBoss {
   const pool = (owner as Db & { $client: pg.Pool }).$client;
-  return new PgBoss({ schema: 'pgboss', migrate: false, db: { executeSql: (text: string, values: unknown[]) => pool.query(text, values) } });
+  return new PgBoss({
+    schema: 'pgboss',
+    migrate: false,
+    db: { executeSql: (text: string, values: unknown[]) => pool.query(text, values) },
+  });
 }

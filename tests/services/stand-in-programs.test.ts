@@ -6,7 +6,12 @@ import type { AddressInfo } from 'node:net';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { afterAll, afterEach, beforeAll, describe, expect, test } from 'vitest';
-import { createConnectedAccount, createCustomer, payInvoiceIntent, savePaymentMethod } from '@/lib/payments/payments';
+import {
+  createConnectedAccount,
+  createCustomer,
+  payInvoiceIntent,
+  savePaymentMethod,
+} from '@/lib/payments/payments';
 import { makeStripe } from '@/lib/payments/stripe-client';
 
 let dir: string;
@@ -29,11 +34,15 @@ async function freePort(): Promise<number> {
 }
 
 function run(name: string, env: Record<string, string>) {
-  const child = spawn(process.execPath, ['--import', 'tsx', `fakes/${name}/server.ts`], { env: { ...process.env, ...env } });
+  const child = spawn(process.execPath, ['--import', 'tsx', `fakes/${name}/server.ts`], {
+    env: { ...process.env, ...env },
+  });
   running.push(child);
   let complaint = '';
   child.stderr.on('data', (chunk: Buffer) => (complaint += chunk.toString()));
-  const ended = new Promise<{ code: number | null; complaint: string }>((done) => child.on('exit', (code) => done({ code, complaint })));
+  const ended = new Promise<{ code: number | null; complaint: string }>((done) =>
+    child.on('exit', (code) => done({ code, complaint })),
+  );
   return { child, ended };
 }
 
@@ -47,11 +56,19 @@ async function isUp(port: number): Promise<boolean> {
 const settings = async (name: string, port: number): Promise<Record<string, string>> => {
   switch (name) {
     case 'mail':
-      return { FAKE_SMTP_PORT: String(await freePort()), FAKE_MAIL_HTTP_PORT: String(port), FAKE_MAIL_DIR: path.join(dir, 'mail') };
+      return {
+        FAKE_SMTP_PORT: String(await freePort()),
+        FAKE_MAIL_HTTP_PORT: String(port),
+        FAKE_MAIL_DIR: path.join(dir, 'mail'),
+      };
     case 'storage':
       return { FAKE_STORAGE_PORT: String(port), FAKE_STORAGE_DIR: path.join(dir, 'storage') };
     default:
-      return { FAKE_PAYMENTS_PORT: String(port), FAKE_PAYMENTS_FILE: path.join(dir, 'payments.json'), APP_URL: 'http://127.0.0.1:1' };
+      return {
+        FAKE_PAYMENTS_PORT: String(port),
+        FAKE_PAYMENTS_FILE: path.join(dir, 'payments.json'),
+        APP_URL: 'http://127.0.0.1:1',
+      };
   }
 };
 
@@ -72,7 +89,12 @@ describe.each(['mail', 'storage', 'payments'])('the %s stand-in as a program', (
   }, 120_000);
 
   test('refuses a port that is none', async () => {
-    const env = Object.fromEntries(Object.entries(await settings(name, 1)).map(([key, value]) => [key, key.endsWith('PORT') ? 'mail' : value]));
+    const env = Object.fromEntries(
+      Object.entries(await settings(name, 1)).map(([key, value]) => [
+        key,
+        key.endsWith('PORT') ? 'mail' : value,
+      ]),
+    );
     const { code, complaint } = await run(name, env).ended;
     expect(code).toBe(1);
     expect(complaint).toContain('must be a port number');
@@ -81,15 +103,33 @@ describe.each(['mail', 'storage', 'payments'])('the %s stand-in as a program', (
 
 test('a payment answered before the payments stand-in was killed is there afterwards, once', async () => {
   const port = await freePort();
-  const env = { ...(await settings('payments', port)), FAKE_PAYMENTS_FILE: path.join(dir, `${randomUUID()}.json`) };
+  const env = {
+    ...(await settings('payments', port)),
+    FAKE_PAYMENTS_FILE: path.join(dir, `${randomUUID()}.json`),
+  };
   const stripe = makeStripe({ secretKey: 'sk_test_local', apiBase: `http://127.0.0.1:${port}` });
   const first = run('payments', env);
   await expect.poll(() => isUp(port), { timeout: 60_000 }).toBe(true);
 
-  const customer = await createCustomer({ name: 'Shop', email: 'office@shop.test', shopId: randomUUID() }, stripe);
-  const account = await createConnectedAccount({ name: 'Plater', email: 'desk@plater.test', country: 'US', processorId: randomUUID() }, stripe);
-  const link = await stripe.accountLinks.create({ account, type: 'account_onboarding', return_url: 'http://localhost/a', refresh_url: 'http://localhost/b' });
-  await fetch(link.url, { method: 'POST', body: new URLSearchParams({ account_number: '000123456789' }), redirect: 'manual' });
+  const customer = await createCustomer(
+    { name: 'Shop', email: 'office@shop.test', shopId: randomUUID() },
+    stripe,
+  );
+  const account = await createConnectedAccount(
+    { name: 'Plater', email: 'desk@plater.test', country: 'US', processorId: randomUUID() },
+    stripe,
+  );
+  const link = await stripe.accountLinks.create({
+    account,
+    type: 'account_onboarding',
+    return_url: 'http://localhost/a',
+    refresh_url: 'http://localhost/b',
+  });
+  await fetch(link.url, {
+    method: 'POST',
+    body: new URLSearchParams({ account_number: '000123456789' }),
+    redirect: 'manual',
+  });
   const payment = {
     amountMinor: 12_300,
     currency: 'USD',

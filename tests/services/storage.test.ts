@@ -5,7 +5,15 @@ import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { afterAll, afterEach, beforeAll, describe, expect, test } from 'vitest';
 import { startStorageServer, type StorageServer } from '@/fakes/storage/server';
-import { checkStorage, deleteUnverifiedUpload, getObject, headObject, presignUpload, putObject, readObject } from '@/lib/storage/object-store';
+import {
+  checkStorage,
+  deleteUnverifiedUpload,
+  getObject,
+  headObject,
+  presignUpload,
+  putObject,
+  readObject,
+} from '@/lib/storage/object-store';
 import { makeStorage, type Storage } from '@/lib/storage/storage-client';
 
 const ORIGIN = 'http://localhost:5600';
@@ -26,11 +34,21 @@ afterAll(async () => {
 });
 
 function storageAt(endpoint: string, changes: { bucket?: string; secretAccessKey?: string } = {}): Storage {
-  return makeStorage({ endpoint, region: 'us-east-1', bucket: 'lotwright', accessKeyId: 'S3RVER', secretAccessKey: 'S3RVER', ...changes });
+  return makeStorage({
+    endpoint,
+    region: 'us-east-1',
+    bucket: 'lotwright',
+    accessKeyId: 'S3RVER',
+    secretAccessKey: 'S3RVER',
+    ...changes,
+  });
 }
 
 async function fail(mode: string): Promise<void> {
-  const answer = await fetch(`${server.address}/control`, { method: 'POST', body: JSON.stringify({ fail: mode }) });
+  const answer = await fetch(`${server.address}/control`, {
+    method: 'POST',
+    body: JSON.stringify({ fail: mode }),
+  });
   expect(answer.status).toBe(200);
 }
 
@@ -38,8 +56,13 @@ const newKey = () => `uploads/${randomUUID()}`;
 const sha256Of = (content: Buffer) => createHash('sha256').update(content).digest('hex');
 const content = Buffer.from('%PDF-1.7 a certificate of 41 pieces');
 
-const announce = (changes: { mediaType?: string; sizeBytes?: number; sha256?: string; now?: Date; key?: string } = {}) =>
-  presignUpload({ key: newKey(), mediaType: 'application/pdf', sizeBytes: content.length, now: new Date(), ...changes }, storage);
+const announce = (
+  changes: { mediaType?: string; sizeBytes?: number; sha256?: string; now?: Date; key?: string } = {},
+) =>
+  presignUpload(
+    { key: newKey(), mediaType: 'application/pdf', sizeBytes: content.length, now: new Date(), ...changes },
+    storage,
+  );
 
 const upload = ({ url, headers }: { url: string; headers: Record<string, string> }, body: Buffer = content) =>
   fetch(url, { method: 'PUT', headers, body: new Uint8Array(body) });
@@ -49,7 +72,10 @@ describe('an upload straight from the browser', () => {
     const key = newKey();
     const signed = await announce({ key, sha256: sha256Of(content) });
     expect((await upload(signed)).status).toBe(200);
-    expect(await headObject(key, storage)).toEqual({ sizeBytes: content.length, mediaType: 'application/pdf' });
+    expect(await headObject(key, storage)).toEqual({
+      sizeBytes: content.length,
+      mediaType: 'application/pdf',
+    });
     expect((await readObject(key, storage)).equals(content)).toBe(true);
   });
 
@@ -60,14 +86,14 @@ describe('an upload straight from the browser', () => {
     expect(await headObject(key, storage)).toBeNull();
   });
 
-  test.each([['longer', Buffer.concat([content, content])], ['shorter', content.subarray(1)]])(
-    'that is %s than announced is refused',
-    async (_how, body) => {
-      const key = newKey();
-      expect((await upload(await announce({ key }), body)).status).toBe(403);
-      expect(await headObject(key, storage)).toBeNull();
-    },
-  );
+  test.each([
+    ['longer', Buffer.concat([content, content])],
+    ['shorter', content.subarray(1)],
+  ])('that is %s than announced is refused', async (_how, body) => {
+    const key = newKey();
+    expect((await upload(await announce({ key }), body)).status).toBe(403);
+    expect(await headObject(key, storage)).toBeNull();
+  });
 
   test('of other bytes of the same length is refused, also over a file that is already there', async () => {
     const key = newKey();
@@ -83,7 +109,11 @@ describe('an upload straight from the browser', () => {
   });
 
   test.each([
-    ['another signature', (url: string) => url.replace(/X-Amz-Signature=(.)/, (_all, digit) => `X-Amz-Signature=${digit === '0' ? '1' : '0'}`)],
+    [
+      'another signature',
+      (url: string) =>
+        url.replace(/X-Amz-Signature=(.)/, (_all, digit) => `X-Amz-Signature=${digit === '0' ? '1' : '0'}`),
+    ],
     ['another key', (url: string) => url.replace('/uploads/', '/originals/')],
     ['a later expiry', (url: string) => url.replace('X-Amz-Expires=600', 'X-Amz-Expires=6000')],
     ['no signature at all', (url: string) => url.split('?')[0] ?? ''],
@@ -105,7 +135,11 @@ describe('an upload straight from the browser', () => {
     const preflight = (origin: string) =>
       fetch(url, {
         method: 'OPTIONS',
-        headers: { origin, 'access-control-request-method': 'PUT', 'access-control-request-headers': 'content-type' },
+        headers: {
+          origin,
+          'access-control-request-method': 'PUT',
+          'access-control-request-headers': 'content-type',
+        },
       });
     expect((await preflight(ORIGIN)).status).toBe(200);
     expect((await preflight('http://elsewhere.test')).status).toBe(403);
@@ -115,11 +149,19 @@ describe('an upload straight from the browser', () => {
     const key = newKey();
     const { url, headers } = await announce({ key, sizeBytes: 1_000_000 });
     await new Promise<void>((resolve) => {
-      const sending = httpRequest(url, { method: 'PUT', headers: { ...headers, 'content-length': '1000000' } });
+      const sending = httpRequest(url, {
+        method: 'PUT',
+        headers: { ...headers, 'content-length': '1000000' },
+      });
       sending.on('error', () => resolve());
       sending.write(Buffer.alloc(200_000), () => setTimeout(() => sending.destroy(new Error('cut')), 50));
     });
-    await expect.poll(async () => (await readdir(dir, { recursive: true })).filter((name) => name.endsWith('.partial')), { timeout: 20_000 }).toEqual([]);
+    await expect
+      .poll(
+        async () => (await readdir(dir, { recursive: true })).filter((name) => name.endsWith('.partial')),
+        { timeout: 20_000 },
+      )
+      .toEqual([]);
     expect(await headObject(key, storage)).toBeNull();
   });
 });
@@ -158,7 +200,9 @@ describe('an object', () => {
 
   test('is refused to a client with the wrong key', async () => {
     const stranger = storageAt(server.address, { secretAccessKey: 'guessed' });
-    await expect(putObject({ key: newKey(), content, mediaType: 'application/pdf' }, stranger)).rejects.toMatchObject({
+    await expect(
+      putObject({ key: newKey(), content, mediaType: 'application/pdf' }, stranger),
+    ).rejects.toMatchObject({
       code: 'unavailable',
       details: { extra: { reason: 'SignatureDoesNotMatch' } },
     });
@@ -186,8 +230,14 @@ describe('a storage in trouble', () => {
 
   test('is seen by the readiness check, and so is a missing bucket', async () => {
     await expect(checkStorage(storage)).resolves.toBeUndefined();
-    await expect(checkStorage(storageAt(server.address, { bucket: 'another' }))).rejects.toMatchObject({ code: 'unavailable' });
-    await expect(checkStorage(storageAt(server.address, { secretAccessKey: 'guessed' }))).rejects.toMatchObject({ code: 'unavailable' });
-    await expect(checkStorage(storageAt('http://127.0.0.1:1'))).rejects.toMatchObject({ code: 'unavailable' });
+    await expect(checkStorage(storageAt(server.address, { bucket: 'another' }))).rejects.toMatchObject({
+      code: 'unavailable',
+    });
+    await expect(
+      checkStorage(storageAt(server.address, { secretAccessKey: 'guessed' })),
+    ).rejects.toMatchObject({ code: 'unavailable' });
+    await expect(checkStorage(storageAt('http://127.0.0.1:1'))).rejects.toMatchObject({
+      code: 'unavailable',
+    });
   });
 });

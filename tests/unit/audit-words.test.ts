@@ -3,15 +3,30 @@ import { expect, test } from 'vitest';
 import { actionWords, changesBetween, pageOfThing } from '@/lib/audit/words';
 
 test('only what is different is told, in words', () => {
-  expect(changesBetween({ zone: 'UTC', name: 'Yard', active: true, note: null }, { zone: 'Europe/Oslo', name: 'Yard', active: false, note: '' })).toEqual([
+  expect(
+    changesBetween(
+      { zone: 'UTC', name: 'Yard', active: true, note: null },
+      { zone: 'Europe/Oslo', name: 'Yard', active: false, note: '' },
+    ),
+  ).toEqual([
     { field: 'zone', before: 'UTC', after: 'Europe/Oslo' },
     { field: 'active', before: 'yes', after: 'no' },
   ]);
 });
 
 test('lists and things inside are words too, without ids and without nothing', () => {
-  const [change] = changesBetween(null, { lines: [{ id: '01a23042-b8c2-71fc-92a8-183aa52375a4', lineNo: 1, good: 8, note: null }, { lineNo: 2, good: 3, note: 'wet' }], roles: ['lead', 'admin'] });
-  expect(change).toEqual({ field: 'lines', before: null, after: 'line no 1, good 8; line no 2, good 3, note wet' });
+  const [change] = changesBetween(null, {
+    lines: [
+      { id: '01a23042-b8c2-71fc-92a8-183aa52375a4', lineNo: 1, good: 8, note: null },
+      { lineNo: 2, good: 3, note: 'wet' },
+    ],
+    roles: ['lead', 'admin'],
+  });
+  expect(change).toEqual({
+    field: 'lines',
+    before: null,
+    after: 'line no 1, good 8; line no 2, good 3, note wet',
+  });
 });
 
 test('an action is its verb, and a thing with a page links to it', () => {

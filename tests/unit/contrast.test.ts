@@ -4,7 +4,9 @@ import { describe, expect, test } from 'vitest';
 const css = readFileSync(new URL('../../app/tokens.css', import.meta.url), 'utf8');
 const [dayBlock = '', nightBlock = ''] = css.split('@utility night-tokens');
 const tokens = (block: string) =>
-  new Map([...block.matchAll(/--([\w-]+):\s*(#[0-9a-f]{6})/g)].map(([, name = '', value = '']) => [name, value]));
+  new Map(
+    [...block.matchAll(/--([\w-]+):\s*(#[0-9a-f]{6})/g)].map(([, name = '', value = '']) => [name, value]),
+  );
 const day = tokens(dayBlock);
 const night = new Map([...day, ...tokens(nightBlock)]);
 
@@ -19,7 +21,8 @@ describe.each([
   test.each(['ink', 'quiet', 'faint'])('%s can be read on paper, bench and field', (ink) => {
     for (const ground of ['paper', 'bench', 'field']) expect(ratio(ink, ground)).toBeGreaterThanOrEqual(4.5);
   });
-  test('faint can be read on a button that waits', () => expect(ratio('faint', 'deep')).toBeGreaterThanOrEqual(4));
+  test('faint can be read on a button that waits', () =>
+    expect(ratio('faint', 'deep')).toBeGreaterThanOrEqual(4));
   test('a border of a field can be seen', () => expect(ratio('line', 'paper')).toBeGreaterThanOrEqual(3));
   test.each(STAGES)('the ink of %s can be read on paper, bench and its wash', (stage) => {
     for (const ground of ['paper', 'bench', `${stage}-wash`])

@@ -14,8 +14,10 @@ import {
 const clock: Clock = { zone: 'America/Halifax', now: new Date('2026-04-16T11:40:00Z') };
 
 describe('days in words', () => {
-  test('a day of this year is said without its year', () => expect(dayWords('2026-04-30', clock)).toBe('Thu 30 Apr'));
-  test('a day of another year is said with it', () => expect(dayWords('2027-01-11', clock)).toBe('Mon 11 Jan 2027'));
+  test('a day of this year is said without its year', () =>
+    expect(dayWords('2026-04-30', clock)).toBe('Thu 30 Apr'));
+  test('a day of another year is said with it', () =>
+    expect(dayWords('2027-01-11', clock)).toBe('Mon 11 Jan 2027'));
   test('a single figure stands alone', () => expect(shortDayWords('2026-05-04', clock)).toBe('4 May'));
 
   test('a moment is told by the clock of the shop, in 24 hours', () => {
@@ -43,4 +45,5 @@ describe('how long until then', () => {
   test('a change of the clocks is still one day', () => expect(addDays('2026-03-07', 2)).toBe('2026-03-09'));
 });
 
-test('what is not a day is refused, not guessed', () => expect(() => dayWords('16.4.2026', clock)).toThrow(RangeError));
+test('what is not a day is refused, not guessed', () =>
+  expect(() => dayWords('16.4.2026', clock)).toThrow(RangeError));

@@ -35,7 +35,9 @@ describe('the environment', () => {
   });
 
   test('all that is wrong is said at once', () => {
-    expect(() => parseEnvironment({ PORT: 'web', LOG_LEVEL: 'loud', AUTH_SECRET })).toThrow(/PORT[^]*LOG_LEVEL/);
+    expect(() => parseEnvironment({ PORT: 'web', LOG_LEVEL: 'loud', AUTH_SECRET })).toThrow(
+      /PORT[^]*LOG_LEVEL/,
+    );
   });
 
   test('a name without a value counts as not set', () => {
@@ -52,6 +54,8 @@ describe('the environment', () => {
   });
 
   test('links never get a double slash from an address that ends in one', () => {
-    expect(parseEnvironment({ AUTH_SECRET, APP_URL: 'https://a.example.test/' }).APP_URL).toBe('https://a.example.test');
+    expect(parseEnvironment({ AUTH_SECRET, APP_URL: 'https://a.example.test/' }).APP_URL).toBe(
+      'https://a.example.test',
+    );
   });
 });

@@ -62,5 +62,8 @@ test.each([
   [undefined, []],
   [false, []],
   ['1', ['1']],
-  [['1', '2'], ['1', '2']],
+  [
+    ['1', '2'],
+    ['1', '2'],
+  ],
 ])('%o is the list %o', (given, expected) => expect(list(z.string()).parse(given)).toEqual(expected));

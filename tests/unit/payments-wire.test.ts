@@ -8,7 +8,10 @@ import { behaviourOfAmount } from '@/fakes/payments/test-methods';
 describe('the bracketed form of the payment interface', () => {
   test.each([
     ['amount=1', { amount: '1' }],
-    ['transfer_data[destination]=acct_1&metadata[a b]=c', { transfer_data: { destination: 'acct_1' }, metadata: { 'a b': 'c' } }],
+    [
+      'transfer_data[destination]=acct_1&metadata[a b]=c',
+      { transfer_data: { destination: 'acct_1' }, metadata: { 'a b': 'c' } },
+    ],
     ['expand[0]=a&expand[1]=b.c', { expand: ['a', 'b.c'] }],
     ['expand[]=a&expand[]=b', { expand: ['a', 'b'] }],
     ['a[b][0][c]=1', { a: { b: [{ c: '1' }] } }],

@@ -2,7 +2,14 @@ import { expect, test } from 'vitest';
 
 import { safeNext } from '@/lib/people/safe-next';
 
-test.each(['/', '/batches', '/batches?stage=held&after=1', '/batches/0198#history', '/b/some-token', '/settings/account'])('%s is a place of ours', (next) => {
+test.each([
+  '/',
+  '/batches',
+  '/batches?stage=held&after=1',
+  '/batches/0198#history',
+  '/b/some-token',
+  '/settings/account',
+])('%s is a place of ours', (next) => {
   expect(safeNext(next)).toBe(next);
 });
 
@@ -23,6 +30,9 @@ test.each([
   expect(safeNext(next)).toBe('/');
 });
 
-test.each(['/sign-in', '/sign-in/link', '/api/batches', '/reset/abc', '/sign-in-link/abc', '/x/../sign-in'])('%s would go round in a circle, or is no page', (next) => {
-  expect(safeNext(next)).toBe('/');
-});
+test.each(['/sign-in', '/sign-in/link', '/api/batches', '/reset/abc', '/sign-in-link/abc', '/x/../sign-in'])(
+  '%s would go round in a circle, or is no page',
+  (next) => {
+    expect(safeNext(next)).toBe('/');
+  },
+);

@@ -1,7 +1,10 @@
 import { describe, expect, test } from 'vitest';
 import { isInSection, shopSections } from '@/components/shell/sections';
 
-const sectionOf = (path: string) => shopSections(['admin']).filter((section) => isInSection(path, section)).map((s) => s.says);
+const sectionOf = (path: string) =>
+  shopSections(['admin'])
+    .filter((section) => isInSection(path, section))
+    .map((s) => s.says);
 
 describe('the section a page belongs to', () => {
   test.each([

@@ -20,7 +20,11 @@ describe('the settings of the local stack', () => {
   });
 
   test('a service with an address is used and not started', () => {
-    const given = { SMTP_URL: 'smtp://mail.example.test', STRIPE_SECRET_KEY: 'sk', STRIPE_WEBHOOK_SECRET: 'wh' };
+    const given = {
+      SMTP_URL: 'smtp://mail.example.test',
+      STRIPE_SECRET_KEY: 'sk',
+      STRIPE_WEBHOOK_SECRET: 'wh',
+    };
     const { runsHere, env } = stackSettings('local', given, root);
     expect(runsHere).toMatchObject({ database: true, mail: false, storage: true, payments: false });
     expect(env).not.toHaveProperty('SMTP_URL');
@@ -28,7 +32,9 @@ describe('the settings of the local stack', () => {
   });
 
   test('half a database is refused by name', () => {
-    expect(() => stackSettings('local', { DATABASE_URL: 'postgresql://a' }, root)).toThrow('DATABASE_OWNER_URL');
+    expect(() => stackSettings('local', { DATABASE_URL: 'postgresql://a' }, root)).toThrow(
+      'DATABASE_OWNER_URL',
+    );
   });
 
   test('the secret is made once, kept, and read by nobody else', () => {

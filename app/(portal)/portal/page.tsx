@@ -18,7 +18,12 @@ export default async function WorkPage({ searchParams }: WorkPageProps) {
   return (
     <PortalFrame at={typeof at === 'string' ? at : undefined}>
       <Prefetched queries={[ask(listPortalBatchesEndpoint, { show })]}>
-        <WorkList key={show} shopId={typeof shop === 'string' ? shop : undefined} show={show} now={new Date().toISOString()} />
+        <WorkList
+          key={show}
+          shopId={typeof shop === 'string' ? shop : undefined}
+          show={show}
+          now={new Date().toISOString()}
+        />
       </Prefetched>
     </PortalFrame>
   );

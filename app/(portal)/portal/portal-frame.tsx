@@ -32,7 +32,14 @@ export async function PortalFrame({ at, children }: { at?: string | undefined; c
       singleKeys={singleKeys}
       numberField={<PortalHeadSearch />}
       scan={<PortalPhoneSearch />}
-      personPanel={<PersonPanel look={readLook(kept.get(LOOK_COOKIE)?.value)} singleKeys={singleKeys} accountHref="/portal/account" signOut={signOutHere} />}
+      personPanel={
+        <PersonPanel
+          look={readLook(kept.get(LOOK_COOKIE)?.value)}
+          singleKeys={singleKeys}
+          accountHref="/portal/account"
+          signOut={signOutHere}
+        />
+      }
     >
       {children}
     </ShopShell>

@@ -9,13 +9,22 @@ import { safeNext } from '@/lib/people/safe-next';
 
 export const metadata: Metadata = { title: 'Sign in' };
 
-export default async function SignInPage({ searchParams }: { searchParams: Promise<{ next?: string; email?: string; error?: string }> }) {
+export default async function SignInPage({
+  searchParams,
+}: {
+  searchParams: Promise<{ next?: string; email?: string; error?: string }>;
+}) {
   const { next, email, error } = await searchParams;
   const to = safeNext(next);
   if ((await viewer()).actor.kind === 'person' && error === undefined) redirect(to);
   return (
     <PublicPage title="Sign in" lead="Out, proved, back: your batches, their processors and their papers.">
-      <SignInForm action={signInWithForm} next={to} email={email?.slice(0, 254)} refused={error === undefined ? undefined : 'You were not signed in. Try again.'} />
+      <SignInForm
+        action={signInWithForm}
+        next={to}
+        email={email?.slice(0, 254)}
+        refused={error === undefined ? undefined : 'You were not signed in. Try again.'}
+      />
     </PublicPage>
   );
 }

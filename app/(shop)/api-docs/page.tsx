@@ -12,6 +12,17 @@ export const metadata: Metadata = { title: 'For programs' };
 
 export default async function ApiDocsPage() {
   await readOnServer(getMeEndpoint, {});
-  const holders = Object.fromEntries(Object.entries(PERMISSIONS).map(([name, roles]) => [name, roles === 'everyone' ? 'everyone' : roles.join(', ')]));
-  return <ApiDocs operations={ALL_ENDPOINTS.map(({ declaration }) => readableOperation(declaration))} holders={holders} address={env.APP_URL} />;
+  const holders = Object.fromEntries(
+    Object.entries(PERMISSIONS).map(([name, roles]) => [
+      name,
+      roles === 'everyone' ? 'everyone' : roles.join(', '),
+    ]),
+  );
+  return (
+    <ApiDocs
+      operations={ALL_ENDPOINTS.map(({ declaration }) => readableOperation(declaration))}
+      holders={holders}
+      address={env.APP_URL}
+    />
+  );
 }

@@ -7,7 +7,11 @@ import { getMeEndpoint } from '@/lib/session/endpoints';
 
 export const metadata: Metadata = { title: 'Assemblies' };
 
-export default async function AssembliesPage({ searchParams }: { searchParams: Promise<{ closed?: string | string[] }> }) {
+export default async function AssembliesPage({
+  searchParams,
+}: {
+  searchParams: Promise<{ closed?: string | string[] }>;
+}) {
   const closed = (await searchParams).closed === '1' ? '1' : '0';
   return (
     <Prefetched queries={[ask(getMeEndpoint, {}), ask(listAssembliesEndpoint, { closed })]}>

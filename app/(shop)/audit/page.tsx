@@ -9,10 +9,16 @@ export const metadata: Metadata = { title: 'Audit trail' };
 
 const FILTERS = ['entity', 'entityId', 'personId', 'from', 'to'] as const;
 
-export default async function AuditPage({ searchParams }: { searchParams: Promise<Record<string, string | string[] | undefined>> }) {
+export default async function AuditPage({
+  searchParams,
+}: {
+  searchParams: Promise<Record<string, string | string[] | undefined>>;
+}) {
   const filter = readFilter(await searchParams);
   return (
-    <Prefetched queries={[ask(listAuditFiltersEndpoint, {}), ask(listAuditEndpoint, { ...filter, limit: 50 })]}>
+    <Prefetched
+      queries={[ask(listAuditFiltersEndpoint, {}), ask(listAuditEndpoint, { ...filter, limit: 50 })]}
+    >
       <AuditScreen filter={filter} />
     </Prefetched>
   );
@@ -23,7 +29,8 @@ function readFilter(search: Record<string, string | string[] | undefined>): Audi
   const filter: AuditFilter = {};
   for (const name of FILTERS) {
     const value = search[name];
-    if (typeof value === 'string' && listAudit.input.shape[name].safeParse(value).success) filter[name] = value;
+    if (typeof value === 'string' && listAudit.input.shape[name].safeParse(value).success)
+      filter[name] = value;
   }
   return filter;
 }

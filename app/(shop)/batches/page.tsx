@@ -9,7 +9,11 @@ import { readBatchFilter } from './search';
 
 export const metadata: Metadata = { title: 'Batches' };
 
-export default async function BatchesPage({ searchParams }: { searchParams: Promise<Record<string, string | string[] | undefined>> }) {
+export default async function BatchesPage({
+  searchParams,
+}: {
+  searchParams: Promise<Record<string, string | string[] | undefined>>;
+}) {
   const filter = readBatchFilter(await searchParams);
   return (
     <Prefetched queries={[ask(getMeEndpoint, {}), ask(listBatchesEndpoint, { ...filter })]}>

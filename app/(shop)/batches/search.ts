@@ -13,8 +13,15 @@ export function readBatchFilter(search: Search): BatchFilter {
 
 /** The step the address asks for; null where it asks for none. */
 export function readAskedStep(search: Search): AskedStep | null {
-  const asked = listWaitingLots.input.pick({ process: true, specification: true, specificationRevision: true, classType: true }).safeParse(search);
+  const asked = listWaitingLots.input
+    .pick({ process: true, specification: true, specificationRevision: true, classType: true })
+    .safeParse(search);
   if (!asked.success) return null;
   const { process, specification, specificationRevision, classType } = asked.data;
-  return { process, specification, ...(specificationRevision === undefined ? {} : { specificationRevision }), ...(classType === undefined ? {} : { classType }) };
+  return {
+    process,
+    specification,
+    ...(specificationRevision === undefined ? {} : { specificationRevision }),
+    ...(classType === undefined ? {} : { classType }),
+  };
 }

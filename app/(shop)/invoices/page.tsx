@@ -18,4 +18,5 @@ export default async function InvoicesPage({ searchParams }: { searchParams: Pro
   );
 }
 
-const isView = (given: string | undefined): given is InvoiceView => INVOICE_VIEWS.some((view) => view === given);
+const isView = (given: string | undefined): given is InvoiceView =>
+  INVOICE_VIEWS.some((view) => view === given);

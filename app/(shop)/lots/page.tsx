@@ -9,7 +9,11 @@ import { readLotFilter } from './search';
 
 export const metadata: Metadata = { title: 'Lots' };
 
-export default async function LotsPage({ searchParams }: { searchParams: Promise<Record<string, string | string[] | undefined>> }) {
+export default async function LotsPage({
+  searchParams,
+}: {
+  searchParams: Promise<Record<string, string | string[] | undefined>>;
+}) {
   const filter = readLotFilter(await searchParams);
   return (
     <Prefetched queries={[ask(getMeEndpoint, {}), ask(listLotsEndpoint, { ...filter })]}>

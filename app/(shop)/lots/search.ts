@@ -11,7 +11,8 @@ export function readLotFilter(search: Record<string, string | string[] | undefin
   const filter: Record<string, string> = {};
   for (const name of FILTERS) {
     const value = search[name];
-    if (typeof value === 'string' && value !== '' && listLots.input.shape[name].safeParse(value).success) filter[name] = value;
+    if (typeof value === 'string' && value !== '' && listLots.input.shape[name].safeParse(value).success)
+      filter[name] = value;
   }
   return filter;
 }

@@ -7,7 +7,11 @@ import { getMeEndpoint } from '@/lib/session/endpoints';
 
 export const metadata: Metadata = { title: 'Parts' };
 
-export default async function PartsPage({ searchParams }: { searchParams: Promise<Record<string, string | string[] | undefined>> }) {
+export default async function PartsPage({
+  searchParams,
+}: {
+  searchParams: Promise<Record<string, string | string[] | undefined>>;
+}) {
   const filter = readFilter(await searchParams);
   return (
     <Prefetched queries={[ask(getMeEndpoint, {}), ask(listPartsEndpoint, { ...filter })]}>

@@ -9,10 +9,20 @@ import { readStockFilter } from './search';
 
 export const metadata: Metadata = { title: 'Stock' };
 
-export default async function StockPage({ searchParams }: { searchParams: Promise<Record<string, string | string[] | undefined>> }) {
+export default async function StockPage({
+  searchParams,
+}: {
+  searchParams: Promise<Record<string, string | string[] | undefined>>;
+}) {
   const filter = readStockFilter(await searchParams);
   return (
-    <Prefetched queries={[ask(getMeEndpoint, {}), ask(listLocationsEndpoint, {}), ask(listStockEndpoint, { ...filter })]}>
+    <Prefetched
+      queries={[
+        ask(getMeEndpoint, {}),
+        ask(listLocationsEndpoint, {}),
+        ask(listStockEndpoint, { ...filter }),
+      ]}
+    >
       <StockScreen filter={filter} />
     </Prefetched>
   );

@@ -46,7 +46,12 @@ export function DemoForms() {
       </Section>
       <Section title="Fields">
         <div className="grid gap-x-5 gap-y-4 py-2 sm:grid-cols-2">
-          <NumberInput label="Thickness" unit="in" hint="as on the drawing; kept as you type it" defaultValue="0.063" />
+          <NumberInput
+            label="Thickness"
+            unit="in"
+            hint="as on the drawing; kept as you type it"
+            defaultValue="0.063"
+          />
           <NumberInput label="Pieces" defaultValue="44" error="The lot has 41. Enter 41 or less." />
           <TextField label="Drawing" frozen="frozen at dispatch" defaultValue="FL-4431-08 rev C" />
           <SelectField
@@ -59,7 +64,11 @@ export function DemoForms() {
             ]}
           />
           <DateField label="Promised" defaultValue="2026-04-17" />
-          <SelectField label="Processor" empty="Choose a processor" options={[{ value: '1', says: 'Ostrow Heat Treating' }]} />
+          <SelectField
+            label="Processor"
+            empty="Choose a processor"
+            options={[{ value: '1', says: 'Ostrow Heat Treating' }]}
+          />
           <CheckboxGroup
             label="Covers"
             chosen={['1']}

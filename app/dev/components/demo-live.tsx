@@ -13,8 +13,18 @@ import { Section } from '@/components/ui/section';
 import { SegmentButtons } from '@/components/ui/segments';
 
 const HITS: readonly NumberHit[] = [
-  { kind: 'Batch', number: 'B-0404', says: 'Ostrow Heat Treating, at processor', href: '/dev/components?found=B-0404' },
-  { kind: 'Batch', number: 'B-0407', says: 'Pell & Varga Plating, at processor', href: '/dev/components?found=B-0407' },
+  {
+    kind: 'Batch',
+    number: 'B-0404',
+    says: 'Ostrow Heat Treating, at processor',
+    href: '/dev/components?found=B-0404',
+  },
+  {
+    kind: 'Batch',
+    number: 'B-0407',
+    says: 'Pell & Varga Plating, at processor',
+    href: '/dev/components?found=B-0407',
+  },
   { kind: 'Lot', number: 'L-0404', says: 'Chine angle, aft', href: '/dev/components?found=L-0404' },
 ];
 
@@ -48,12 +58,22 @@ export function DemoLive() {
   return (
     <Section title="Messages, dialog, choices">
       <div className="flex flex-wrap items-end gap-4 py-2">
-        <Button onClick={() => showMessage({ says: 'L-0242 added to load 1.', action: { says: 'Undo', run: () => undefined } })}>
+        <Button
+          onClick={() =>
+            showMessage({ says: 'L-0242 added to load 1.', action: { says: 'Undo', run: () => undefined } })
+          }
+        >
           Add L-0242
         </Button>
         <Button
           look="stop"
-          onClick={() => showMessage({ says: 'Not saved: Tobias changed line 3 at 09:14.', failed: true, action: { says: 'Show both', href: '#both' } })}
+          onClick={() =>
+            showMessage({
+              says: 'Not saved: Tobias changed line 3 at 09:14.',
+              failed: true,
+              action: { says: 'Show both', href: '#both' },
+            })
+          }
         >
           Fail to save
         </Button>

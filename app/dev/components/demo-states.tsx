@@ -35,8 +35,8 @@ export function DemoStates() {
           }
         />
         <Edge level="warn">
-          <strong>No network.</strong> You see 08:31 of today. What you count is kept on this tablet and sent later; signing
-          waits.
+          <strong>No network.</strong> You see 08:31 of today. What you count is kept on this tablet and sent
+          later; signing waits.
         </Edge>
         <Progress says="Reading the certificate" value={2} of={3} where="page 2 of 3" />
         <Loading rows={3} />

@@ -19,9 +19,30 @@ export function DemoTables() {
           ]}
         >
           <LotRow lot="L-0231" part="Bulkhead web, sta 62" pieces={14} mass="5.7" says="rest" />
-          <LotRow lot="L-0236" part="Chine stiffener" pieces={22} mass="6.4" says="selected by key or press" selected />
-          <LotRow lot="L-0240" part="Step frame angle" pieces={8} mass="8.8" says="asks for a decision" state="asks" />
-          <LotRow lot="L-0244" part="Web lightening ring" pieces={30} mass="1.2" says="cannot: its soak ends at 30 min" state="off" />
+          <LotRow
+            lot="L-0236"
+            part="Chine stiffener"
+            pieces={22}
+            mass="6.4"
+            says="selected by key or press"
+            selected
+          />
+          <LotRow
+            lot="L-0240"
+            part="Step frame angle"
+            pieces={8}
+            mass="8.8"
+            says="asks for a decision"
+            state="asks"
+          />
+          <LotRow
+            lot="L-0244"
+            part="Web lightening ring"
+            pieces={30}
+            mass="1.2"
+            says="cannot: its soak ends at 30 min"
+            state="off"
+          />
           <Row state="sum">
             <Cell>Sum</Cell>
             <Cell />
@@ -36,14 +57,28 @@ export function DemoTables() {
         </Table>
       </Section>
       <Section title="What waits for me" note="oldest harm first">
-        <Table label="What waits for me" columns={[{ says: 'Batch', hidden: true }, { says: 'What to do', hidden: true }, { says: 'Action', hidden: true, right: true }]}>
+        <Table
+          label="What waits for me"
+          columns={[
+            { says: 'Batch', hidden: true },
+            { says: 'What to do', hidden: true },
+            { says: 'Action', hidden: true, right: true },
+          ]}
+        >
           <GroupRow says="Late" count={1} span={3} />
           <Row>
             <Cell>
-              <BatchTag stage="at_processor" number="B-0404" size="row" show="number" href="/dev/components" />
+              <BatchTag
+                stage="at_processor"
+                number="B-0404"
+                size="row"
+                show="number"
+                href="/dev/components"
+              />
             </Cell>
             <Cell>
-              <strong>Answer Ostrow</strong> <span className="text-quiet">&quot;Is the bend radius .09 or .06 on line 3?&quot;</span>
+              <strong>Answer Ostrow</strong>{' '}
+              <span className="text-quiet">&quot;Is the bend radius .09 or .06 on line 3?&quot;</span>
             </Cell>
             <Cell right>
               <Button look="word">Answer</Button>
@@ -90,7 +125,9 @@ function LotRow({ lot, part, pieces, mass, says, state = 'rest', selected = fals
       <Cell figure head="Mass, lb">
         {mass}
       </Cell>
-      <Cell quiet={state === 'rest'}>{state === 'asks' ? <strong className="text-held-ink">{says}</strong> : says}</Cell>
+      <Cell quiet={state === 'rest'}>
+        {state === 'asks' ? <strong className="text-held-ink">{says}</strong> : says}
+      </Cell>
     </Row>
   );
 }

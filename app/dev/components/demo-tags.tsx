@@ -41,7 +41,13 @@ export function DemoTags() {
       {SIZES.map((size) => (
         <div key={size} className="flex flex-wrap items-center gap-2 py-1.5">
           {STAGES.map((stage, index) => (
-            <BatchTag key={stage} stage={stage} number={`B-04${11 + index}`} size={size} href="/dev/components" />
+            <BatchTag
+              key={stage}
+              stage={stage}
+              number={`B-04${11 + index}`}
+              size={size}
+              href="/dev/components"
+            />
           ))}
         </div>
       ))}
@@ -57,7 +63,13 @@ export function DemoTags() {
         <BatchTag stage="held" number="B-0401" text="16 fittings, bake late" href="/dev/components" />
         <BatchTag stage="dispatched" number="B-0416" text="no date yet" fading />
         <span className="w-52">
-          <BatchTag stage="at_processor" number="B-0411" text="18 strut ends, back Tue 21 Apr" href="/dev/components" wide />
+          <BatchTag
+            stage="at_processor"
+            number="B-0411"
+            text="18 strut ends, back Tue 21 Apr"
+            href="/dev/components"
+            wide
+          />
         </span>
         <BatchTag stage="at_processor" number="B-0414" show="number" />
         <BatchTag stage="returned" number="B-0406" show="mark" />

@@ -17,7 +17,8 @@ export function DemoType() {
         <h3>Ask Ostrow for a date</h3>
         <p>Only a mill makes T3: it needs cold work.</p>
         <p>
-          <strong>Line 5 ends in T3.</strong> <span className="text-quiet">left the yard yesterday 14:05</span>
+          <strong>Line 5 ends in T3.</strong>{' '}
+          <span className="text-quiet">left the yard yesterday 14:05</span>
         </p>
         <p className="font-mono text-figure">0.125 920 °F 41 of 41</p>
         <p className="font-cond text-caption text-faint">Pieces</p>
@@ -54,14 +55,32 @@ export function DemoType() {
               </>
             }
           />
-          <CheckRow level="warn" sentence="Ostrow is approved to 30 Apr," rest="the day you want the pieces back." source="Approval 14-022" />
-          <CheckRow level="note" sentence="Load 1 has 5 minutes of room." rest="The traveller says so in the furnace lines." source="Load plan" />
+          <CheckRow
+            level="warn"
+            sentence="Ostrow is approved to 30 Apr,"
+            rest="the day you want the pieces back."
+            source="Approval 14-022"
+          />
+          <CheckRow
+            level="note"
+            sentence="Load 1 has 5 minutes of room."
+            rest="The traveller says so in the furnace lines."
+            source="Load plan"
+          />
         </CheckList>
         <MetChecks count={11}>Approved for the process. Order of steps. Size of the tank.</MetChecks>
       </Section>
       <Section title="The steel rule">
         <div className="flex flex-wrap items-end gap-7 py-2">
-          <SteelRule says="9.2 of 15 minutes" to={15} tick={1} number={5} value={9.2} tone="proved" limit={{ at: 15, tone: 'held' }} />
+          <SteelRule
+            says="9.2 of 15 minutes"
+            to={15}
+            tick={1}
+            number={5}
+            value={9.2}
+            tone="proved"
+            limit={{ at: 15, tone: 'held' }}
+          />
           <SteelRule
             says="150.32 of the minimum of 180.00"
             to={250}
@@ -72,8 +91,24 @@ export function DemoType() {
             limit={{ at: 180, says: 'minimum 180.00' }}
             width={376}
           />
-          <SteelRule says="38.4 in the band 36.5 to 40.5 % IACS" from={34} to={44} tick={1} number={2} band={{ from: 36.5, to: 40.5 }} limit={{ at: 38.4 }} />
-          <SteelRule says="71 of 136 pieces in stock" to={136} tick={10} number={50} value={71} width={100} small />
+          <SteelRule
+            says="38.4 in the band 36.5 to 40.5 % IACS"
+            from={34}
+            to={44}
+            tick={1}
+            number={2}
+            band={{ from: 36.5, to: 40.5 }}
+            limit={{ at: 38.4 }}
+          />
+          <SteelRule
+            says="71 of 136 pieces in stock"
+            to={136}
+            tick={10}
+            number={50}
+            value={71}
+            width={100}
+            small
+          />
         </div>
       </Section>
       <Edge level="note">

@@ -31,7 +31,14 @@ export default async function KitPage() {
       roles={['lead']}
       sections={shopSections(roles, { certificates: 3 })}
       numberField={<DemoNumberField />}
-      personPanel={<PersonPanel look={look} singleKeys={singleKeys} accountHref="/settings/account" signOut="/api/none" />}
+      personPanel={
+        <PersonPanel
+          look={look}
+          singleKeys={singleKeys}
+          accountHref="/settings/account"
+          signOut="/api/none"
+        />
+      }
       scan={<DemoScan />}
       forMe={7}
       singleKeys={singleKeys}

@@ -3,4 +3,9 @@ import { assembleDossierQueue } from '@/lib/dossiers/assemble-dossier-queue';
 
 import { job } from '../job';
 
-export const assembleDossierJob = job({ ...assembleDossierQueue, retries: 6, concurrency: 1, run: assembleDossier });
+export const assembleDossierJob = job({
+  ...assembleDossierQueue,
+  retries: 6,
+  concurrency: 1,
+  run: assembleDossier,
+});

@@ -11,7 +11,13 @@ export const sendMailJob = job({
   async run(tools, { mailId, template, to, replyTo, shopId, attach, props }) {
     const mail = await renderMail(template, props);
     const attachments = await readAttachments(tools, { shopId, attach });
-    await sendMail({ ...mail, to, attachments, messageId: `${mailId}@${mailDomain()}`, ...(replyTo === null ? {} : { replyTo }) });
+    await sendMail({
+      ...mail,
+      to,
+      attachments,
+      messageId: `${mailId}@${mailDomain()}`,
+      ...(replyTo === null ? {} : { replyTo }),
+    });
   },
 });
 

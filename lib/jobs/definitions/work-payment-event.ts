@@ -3,4 +3,9 @@ import { workPaymentEventQueue } from '@/lib/payments/work-payment-event-queue';
 
 import { job } from '../job';
 
-export const workPaymentEventJob = job({ ...workPaymentEventQueue, retries: 10, retryDelayS: 2, run: workPaymentEvent });
+export const workPaymentEventJob = job({
+  ...workPaymentEventQueue,
+  retries: 10,
+  retryDelayS: 2,
+  run: workPaymentEvent,
+});

@@ -11,7 +11,8 @@ interface Received {
 const INBOX_PORT_AFTER_SMTP = 55;
 
 /** Where the stand-in for mail shows what it got: its own port, a fixed way from the SMTP port. */
-const inboxUrl = (): string => `http://127.0.0.1:${Number(new URL(env.SMTP_URL).port) + INBOX_PORT_AFTER_SMTP}`;
+const inboxUrl = (): string =>
+  `http://127.0.0.1:${Number(new URL(env.SMTP_URL).port) + INBOX_PORT_AFTER_SMTP}`;
 
 /** Waits until a mail to somebody with these words in its subject has arrived. */
 export async function mailTo(address: string, subject: string): Promise<Received> {

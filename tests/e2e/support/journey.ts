@@ -54,13 +54,17 @@ export class Person {
     await this.type(this.page.getByLabel('E-mail'), email);
     await this.type(this.page.getByLabel('Password'), DEMO_PASSWORD);
     await this.press(this.page.getByRole('button', { name: 'Sign in', exact: true }));
-    await this.waiting(() => this.page.waitForURL((url) => !url.pathname.startsWith('/sign-in'), { timeout: 60_000 }));
+    await this.waiting(() =>
+      this.page.waitForURL((url) => !url.pathname.startsWith('/sign-in'), { timeout: 60_000 }),
+    );
   }
 
   /** One line for the log: what the way cost. */
   report(way: string): void {
     const { clicks, keys, pages, waitedS } = this.cost;
-    console.log(`${this.name}, ${way}: ${clicks} clicks, ${keys} keys, ${pages} pages, ${waitedS.toFixed(1)} s of waiting`);
+    console.log(
+      `${this.name}, ${way}: ${clicks} clicks, ${keys} keys, ${pages} pages, ${waitedS.toFixed(1)} s of waiting`,
+    );
   }
 
   private async waiting<T>(work: () => Promise<T>): Promise<T> {
@@ -82,7 +86,11 @@ export const test = base.extend<People>({
   person: async ({ browser, baseURL }, give) => {
     const contexts: Awaited<ReturnType<typeof browser.newContext>>[] = [];
     await give(async (name, width = 1440) => {
-      const context = await browser.newContext({ ...(baseURL === undefined ? {} : { baseURL }), viewport: { width, height: width < 500 ? 844 : 900 }, hasTouch: width < 900 });
+      const context = await browser.newContext({
+        ...(baseURL === undefined ? {} : { baseURL }),
+        viewport: { width, height: width < 500 ? 844 : 900 },
+        hasTouch: width < 900,
+      });
       contexts.push(context);
       return new Person(name, await context.newPage());
     });

@@ -13,7 +13,14 @@ const base = openDatabase();
 
 async function tell(world: World, count: number): Promise<void> {
   for (let at = 1; at <= count; at++) {
-    await world.as(['lead'], (ctx) => recordAudit(ctx, { action: 'lot.create', entity: 'lot', entityId: newId(), after: { pieces: at, note: 'µ-finish “as is”', none: null } }));
+    await world.as(['lead'], (ctx) =>
+      recordAudit(ctx, {
+        action: 'lot.create',
+        entity: 'lot',
+        entityId: newId(),
+        after: { pieces: at, note: 'µ-finish “as is”', none: null },
+      }),
+    );
   }
 }
 
@@ -72,8 +79,13 @@ test.each([
 test('a hash that is computed anew after the change breaks the link to the next entry', async () => {
   const world = await makeWorld(base.db, base.owner);
   await tell(world, 5);
-  await tamper(`update audit_entries set actor_name = 'Somebody Else' where shop_id = $1 and seq = 3`, [world.shopId]);
-  await tamper(`update audit_entries e set hash = encode(sha256(convert_to(previous_hash || audit_text(e), 'UTF8')), 'hex') where shop_id = $1 and seq = 3`, [world.shopId]);
+  await tamper(`update audit_entries set actor_name = 'Somebody Else' where shop_id = $1 and seq = 3`, [
+    world.shopId,
+  ]);
+  await tamper(
+    `update audit_entries e set hash = encode(sha256(convert_to(previous_hash || audit_text(e), 'UTF8')), 'hex') where shop_id = $1 and seq = 3`,
+    [world.shopId],
+  );
   expect(await reportOf(world)).toMatchObject({ entries: 3, broken: { seq: 4, what: 'unlinked' } });
 });
 

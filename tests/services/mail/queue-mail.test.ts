@@ -39,15 +39,28 @@ afterAll(async () => {
   await rm(folder, { recursive: true, force: true });
 });
 
-const fail = (mode: string) => fetch(`${server.address}/control`, { method: 'POST', body: JSON.stringify({ fail: mode }) });
-const inbox = async (to: string) => (await (await fetch(`${server.address}/messages?to=${encodeURIComponent(to)}`)).json()) as StoredMessage[];
+const fail = (mode: string) =>
+  fetch(`${server.address}/control`, { method: 'POST', body: JSON.stringify({ fail: mode }) });
+const inbox = async (to: string) =>
+  (await (await fetch(`${server.address}/messages?to=${encodeURIComponent(to)}`)).json()) as StoredMessage[];
 const address = () => `desk-${newId()}@processor.test`;
 
-const queueIn = (world: World, to: string) => world.as(['lead'], (ctx) => queueMail(ctx, { template: 'dispatch', to, props: sampleMails.dispatch }));
-const waiting = async (to: string) => (await base.owner.execute<{ state: string; retry_limit: number; retry_backoff: boolean; start_after: string }>(sql`select state, retry_limit, retry_backoff, start_after from pgboss.job where name = 'send-mail' and data->'to'->>0 = ${to}`)).rows;
+const queueIn = (world: World, to: string) =>
+  world.as(['lead'], (ctx) => queueMail(ctx, { template: 'dispatch', to, props: sampleMails.dispatch }));
+const waiting = async (to: string) =>
+  (
+    await base.owner.execute<{
+      state: string;
+      retry_limit: number;
+      retry_backoff: boolean;
+      start_after: string;
+    }>(
+      sql`select state, retry_limit, retry_backoff, start_after from pgboss.job where name = 'send-mail' and data->'to'->>0 = ${to}`,
+    )
+  ).rows;
 
 describe('a queued mail', () => {
-  test('is sent once, in the shop\'s name, with an answer reaching whoever caused it', async () => {
+  test("is sent once, in the shop's name, with an answer reaching whoever caused it", async () => {
     const world = await makeWorld(base.db, base.owner);
     const to = address();
     await queueIn(world, to);
@@ -80,14 +93,25 @@ describe('a queued mail', () => {
 
   test('that cannot be rendered, or has no address, stops what causes it', async () => {
     const world = await makeWorld(base.db, base.owner);
-    await expect(world.as(['lead'], (ctx) => queueMail(ctx, { template: 'dispatch', to: address(), props: { ...sampleMails.dispatch, lines: [] } }))).rejects.toThrow();
+    await expect(
+      world.as(['lead'], (ctx) =>
+        queueMail(ctx, {
+          template: 'dispatch',
+          to: address(),
+          props: { ...sampleMails.dispatch, lines: [] },
+        }),
+      ),
+    ).rejects.toThrow();
     await expect(queueIn(world, 'not an address')).rejects.toThrow();
   });
 
   test('may belong to no shop: a sign-in link is queued at the door', async () => {
     const to = address();
     await withTenant(base.db, { kind: 'door' }, (tx) =>
-      queueMail({ tx, tenant: { kind: 'door' }, actor: { kind: 'nobody', name: 'nobody', roles: [] } }, { template: 'sign-in', to, props: sampleMails['sign-in'] }),
+      queueMail(
+        { tx, tenant: { kind: 'door' }, actor: { kind: 'nobody', name: 'nobody', roles: [] } },
+        { template: 'sign-in', to, props: sampleMails['sign-in'] },
+      ),
     );
     const ran = await runJobs(base, sendMailJob);
     expect(ran).toMatchObject([{ data: { shopId: null, replyTo: null } }]);
@@ -96,26 +120,34 @@ describe('a queued mail', () => {
 });
 
 describe('with the mail server in trouble', () => {
-  test.each(['refuse', 'defer', 'reject'])('(%s) the mail is tried again later and the shop sees it waiting', async (mode) => {
-    const world = await makeWorld(base.db, base.owner);
-    const to = address();
-    await fail(mode);
-    await queueIn(world, to);
-    const [ran] = await runJobs(base, sendMailJob);
-    expect(ran?.error).not.toBeNull();
-    const [job] = await waiting(to);
-    expect(job).toMatchObject({ state: 'retry', retry_backoff: true });
-    expect(job?.retry_limit).toBeGreaterThanOrEqual(10);
-    expect(new Date(job?.start_after ?? 0).getTime()).toBeGreaterThan(Date.now());
-    const seen = await world.as(['admin'], async ({ tx }) => (await tx.execute(sql`select name, state from failed_jobs()`)).rows);
-    expect(seen).toEqual([{ name: 'send-mail', state: 'retry' }]);
-    expect(await inbox(to)).toEqual([]);
+  test.each(['refuse', 'defer', 'reject'])(
+    '(%s) the mail is tried again later and the shop sees it waiting',
+    async (mode) => {
+      const world = await makeWorld(base.db, base.owner);
+      const to = address();
+      await fail(mode);
+      await queueIn(world, to);
+      const [ran] = await runJobs(base, sendMailJob);
+      expect(ran?.error).not.toBeNull();
+      const [job] = await waiting(to);
+      expect(job).toMatchObject({ state: 'retry', retry_backoff: true });
+      expect(job?.retry_limit).toBeGreaterThanOrEqual(10);
+      expect(new Date(job?.start_after ?? 0).getTime()).toBeGreaterThan(Date.now());
+      const seen = await world.as(
+        ['admin'],
+        async ({ tx }) => (await tx.execute(sql`select name, state from failed_jobs()`)).rows,
+      );
+      expect(seen).toEqual([{ name: 'send-mail', state: 'retry' }]);
+      expect(await inbox(to)).toEqual([]);
 
-    await fail('none');
-    await base.owner.execute(sql`update pgboss.job set start_after = now() where name = 'send-mail' and data->'to'->>0 = ${to}`);
-    await runJobs(base, sendMailJob);
-    expect(await inbox(to)).toHaveLength(1);
-  });
+      await fail('none');
+      await base.owner.execute(
+        sql`update pgboss.job set start_after = now() where name = 'send-mail' and data->'to'->>0 = ${to}`,
+      );
+      await runJobs(base, sendMailJob);
+      expect(await inbox(to)).toHaveLength(1);
+    },
+  );
 
   test('a line that breaks after the mail was taken makes a repeat that says it is one', async () => {
     const world = await makeWorld(base.db, base.owner);
@@ -124,7 +156,9 @@ describe('with the mail server in trouble', () => {
     await queueIn(world, to);
     expect((await runJobs(base, sendMailJob))[0]?.error).not.toBeNull();
     await fail('none');
-    await base.owner.execute(sql`update pgboss.job set start_after = now() where name = 'send-mail' and data->'to'->>0 = ${to}`);
+    await base.owner.execute(
+      sql`update pgboss.job set start_after = now() where name = 'send-mail' and data->'to'->>0 = ${to}`,
+    );
     await runJobs(base, sendMailJob);
     const messages = await inbox(to);
     expect(messages).toHaveLength(2);
@@ -136,9 +170,19 @@ describe('with the mail server in trouble', () => {
     const to = address();
     await fail('refuse');
     await queueIn(world, to);
-    await base.owner.execute(sql`update pgboss.job set retry_limit = 0 where name = 'send-mail' and data->'to'->>0 = ${to}`);
+    await base.owner.execute(
+      sql`update pgboss.job set retry_limit = 0 where name = 'send-mail' and data->'to'->>0 = ${to}`,
+    );
     await runJobs(base, sendMailJob);
-    const [failed] = await world.as(['admin'], async ({ tx }) => (await tx.execute<{ id: string; state: string; error: string }>(sql`select id, state, error from failed_jobs()`)).rows);
+    const [failed] = await world.as(
+      ['admin'],
+      async ({ tx }) =>
+        (
+          await tx.execute<{ id: string; state: string; error: string }>(
+            sql`select id, state, error from failed_jobs()`,
+          )
+        ).rows,
+    );
     expect(failed).toMatchObject({ state: 'failed' });
     expect(failed?.error).toBeTruthy();
 
@@ -148,4 +192,3 @@ describe('with the mail server in trouble', () => {
     expect(await inbox(to)).toHaveLength(1);
   });
 });
-

@@ -17,19 +17,37 @@ async function settingsOf(world: World) {
 test('an admin settles the policies; the trail holds what is different', async () => {
   const world = await makeWorld(base.db, base.owner);
   const before = await settingsOf(world);
-  const wanted = { ...before, zone: 'America/Halifax', approvalAndPayment: 'refuse' as const, secondApprovalAboveMinor: 250_000, latenessBasis: 'first_promise' as const };
+  const wanted = {
+    ...before,
+    zone: 'America/Halifax',
+    approvalAndPayment: 'refuse' as const,
+    secondApprovalAboveMinor: 250_000,
+    latenessBasis: 'first_promise' as const,
+  };
   expect(await world.as(['admin'], (ctx) => updateShopSettings(ctx, wanted))).toEqual({ version: 2 });
   expect(await settingsOf(world)).toEqual({ ...wanted, version: 2 });
   expect(await world.as(['admin'], (ctx) => lastAudit(ctx, 'shop.change_settings'))).toMatchObject({
-    before: { zone: 'UTC', approvalAndPayment: 'record', secondApprovalAboveMinor: null, latenessBasis: 'latest_promise' },
-    after: { zone: 'America/Halifax', approvalAndPayment: 'refuse', secondApprovalAboveMinor: 250_000, latenessBasis: 'first_promise' },
+    before: {
+      zone: 'UTC',
+      approvalAndPayment: 'record',
+      secondApprovalAboveMinor: null,
+      latenessBasis: 'latest_promise',
+    },
+    after: {
+      zone: 'America/Halifax',
+      approvalAndPayment: 'refuse',
+      secondApprovalAboveMinor: 250_000,
+      latenessBasis: 'first_promise',
+    },
   });
 });
 
 test('nobody but an admin does, everybody of the shop reads', async () => {
   const world = await makeWorld(base.db, base.owner);
   const settings = await settingsOf(world);
-  await expect(world.as(['lead', 'inspector', 'office', 'auditor'], (ctx) => updateShopSettings(ctx, settings))).rejects.toMatchObject({ code: 'not_allowed' });
+  await expect(
+    world.as(['lead', 'inspector', 'office', 'auditor'], (ctx) => updateShopSettings(ctx, settings)),
+  ).rejects.toMatchObject({ code: 'not_allowed' });
   expect(await world.as(['auditor'], (ctx) => getShopSettings(ctx))).toMatchObject({ id: world.shopId });
 });
 
@@ -37,13 +55,17 @@ test('an older version is a conflict', async () => {
   const world = await makeWorld(base.db, base.owner);
   const settings = await settingsOf(world);
   await world.as(['admin'], (ctx) => updateShopSettings(ctx, settings));
-  await expect(world.as(['admin'], (ctx) => updateShopSettings(ctx, settings))).rejects.toMatchObject({ code: 'conflict' });
+  await expect(world.as(['admin'], (ctx) => updateShopSettings(ctx, settings))).rejects.toMatchObject({
+    code: 'conflict',
+  });
 });
 
 test('another shop’s settings are its own', async () => {
   const [one, two] = [await makeWorld(base.db, base.owner), await makeWorld(base.db, base.owner)];
   const before = await settingsOf(two);
-  await one.as(['admin'], async (ctx) => updateShopSettings(ctx, { ...(await getShopSettings(ctx)), name: 'Renamed' }));
+  await one.as(['admin'], async (ctx) =>
+    updateShopSettings(ctx, { ...(await getShopSettings(ctx)), name: 'Renamed' }),
+  );
   expect(await settingsOf(two)).toEqual(before);
 });
 

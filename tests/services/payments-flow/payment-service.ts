@@ -12,7 +12,12 @@ import { startPaymentsServer, type PaymentsServer } from '@/fakes/payments/serve
 import type { Ctx } from '@/lib/auth/context';
 import { newId } from '@/lib/ids';
 import type { Job } from '@/lib/jobs/job';
-import { createConnectedAccount, createCustomer, createOnboardingLink, savePaymentMethod } from '@/lib/payments/payments';
+import {
+  createConnectedAccount,
+  createCustomer,
+  createOnboardingLink,
+  savePaymentMethod,
+} from '@/lib/payments/payments';
 import type { receivePaymentEvent as ReceivePaymentEvent } from '@/lib/payments/receive-payment-event';
 import { makeStripe } from '@/lib/payments/stripe-client';
 
@@ -34,12 +39,20 @@ export function openPaymentService(base: { db: Db; owner: Db }) {
       request.on('data', (chunk: Buffer) => (body += chunk.toString()));
       request.on('end', () => {
         const signature = request.headers['stripe-signature'];
-        void answer(body, typeof signature === 'string' ? signature : null).then((status) => response.writeHead(status).end());
+        void answer(body, typeof signature === 'string' ? signature : null).then((status) =>
+          response.writeHead(status).end(),
+        );
       });
     });
     await new Promise<void>((done) => webhook.listen(0, '127.0.0.1', done));
     const webhookUrl = `http://127.0.0.1:${(webhook.address() as AddressInfo).port}/api/webhooks/payments`;
-    server = await startPaymentsServer({ port: 0, file: path.join(folder, 'payments.json'), webhookUrl, webhookSecret: 'whsec_of_this_test', settleAfterMs: 3_600_000 });
+    server = await startPaymentsServer({
+      port: 0,
+      file: path.join(folder, 'payments.json'),
+      webhookUrl,
+      webhookSecret: 'whsec_of_this_test',
+      settleAfterMs: 3_600_000,
+    });
     vi.resetModules();
     vi.stubEnv('STRIPE_API_BASE', server.address);
     vi.stubEnv('STRIPE_SECRET_KEY', 'sk_test_local');
@@ -62,7 +75,17 @@ export function openPaymentService(base: { db: Db; owner: Db }) {
     await rm(folder, { recursive: true, force: true });
   });
 
-  const atDoor = <T>(work: (ctx: Ctx) => Promise<T>) => withTenant(base.db, { kind: 'door' }, (tx) => work({ tx, tenant: { kind: 'door' }, actor: { kind: 'nobody', name: 'nobody', roles: [] }, now: new Date(), requestId: newId(), address: null }));
+  const atDoor = <T>(work: (ctx: Ctx) => Promise<T>) =>
+    withTenant(base.db, { kind: 'door' }, (tx) =>
+      work({
+        tx,
+        tenant: { kind: 'door' },
+        actor: { kind: 'nobody', name: 'nobody', roles: [] },
+        now: new Date(),
+        requestId: newId(),
+        address: null,
+      }),
+    );
 
   /** What the route answers, without the web server around it. */
   async function answer(body: string, signature: string | null): Promise<number> {
@@ -75,7 +98,10 @@ export function openPaymentService(base: { db: Db; owner: Db }) {
   }
 
   async function control(action: string, given: object): Promise<Record<string, unknown>> {
-    const response = await fetch(`${server.address}/control/${action}`, { method: 'POST', body: JSON.stringify(given) });
+    const response = await fetch(`${server.address}/control/${action}`, {
+      method: 'POST',
+      body: JSON.stringify(given),
+    });
     expect(response.status).toBe(200);
     return (await response.json()) as Record<string, unknown>;
   }
@@ -83,15 +109,40 @@ export function openPaymentService(base: { db: Db; owner: Db }) {
   /** A way to pay for the shop, and a place to be paid for its processor. */
   async function makeReady(world: World, method = 'pm_card_visa') {
     const { stripe } = opened;
-    const customer = await createCustomer({ name: 'Heron Slough Float Works', email: 'office@shop.test', shopId: world.shopId }, stripe);
-    const account = await createConnectedAccount({ name: 'Cedar Hollow Plating', email: 'desk@processor.test', country: 'US', processorId: world.processorId }, stripe);
-    await visit(await createOnboardingLink({ account, returnUrl: 'http://localhost:5600/back', refreshUrl: 'http://localhost:5600/again' }, stripe), { name: 'Cedar Hollow Plating', bank: 'Test Bank', account_number: '000123456789' });
-    await changeShop(base.owner, world, { stripeCustomerId: customer, stripePaymentMethodId: await savePaymentMethod({ customer, paymentMethod: method }, stripe) });
+    const customer = await createCustomer(
+      { name: 'Heron Slough Float Works', email: 'office@shop.test', shopId: world.shopId },
+      stripe,
+    );
+    const account = await createConnectedAccount(
+      {
+        name: 'Cedar Hollow Plating',
+        email: 'desk@processor.test',
+        country: 'US',
+        processorId: world.processorId,
+      },
+      stripe,
+    );
+    await visit(
+      await createOnboardingLink(
+        { account, returnUrl: 'http://localhost:5600/back', refreshUrl: 'http://localhost:5600/again' },
+        stripe,
+      ),
+      { name: 'Cedar Hollow Plating', bank: 'Test Bank', account_number: '000123456789' },
+    );
+    await changeShop(base.owner, world, {
+      stripeCustomerId: customer,
+      stripePaymentMethodId: await savePaymentMethod({ customer, paymentMethod: method }, stripe),
+    });
     await changeProcessor(base.owner, world, { stripeAccountId: account, payoutsReady: true });
-    return { customer, account, intents: async () => (await stripe.paymentIntents.list({ customer, limit: 100 })).data };
+    return {
+      customer,
+      account,
+      intents: async () => (await stripe.paymentIntents.list({ customer, limit: 100 })).data,
+    };
   }
 
-  const visit = (url: string, form: Record<string, string>) => fetch(url, { method: 'POST', body: new URLSearchParams(form), redirect: 'manual' });
+  const visit = (url: string, form: Record<string, string>) =>
+    fetch(url, { method: 'POST', body: new URLSearchParams(form), redirect: 'manual' });
 
   return {
     opened,
@@ -99,7 +150,10 @@ export function openPaymentService(base: { db: Db; owner: Db }) {
     makeReady,
     visit,
     /** Jobs that wait for their next try are due now. */
-    hurry: (name: string) => base.owner.execute(sql`update pgboss.job set start_after = now() where name = ${name} and state in ('created', 'retry')`),
+    hurry: (name: string) =>
+      base.owner.execute(
+        sql`update pgboss.job set start_after = now() where name = ${name} and state in ('created', 'retry')`,
+      ),
     sendPayments: () => runJobs(base, opened.payJob),
     /** Works off the news until the check holds. */
     workUntil: (check: () => Promise<void>) =>

@@ -18,7 +18,15 @@ export interface TableFacts {
 
 /** Every table of the product, from the catalogue, so that one added tomorrow is looked at too. */
 export async function tablesOf(client: pg.Client): Promise<TableFacts[]> {
-  const { rows } = await client.query<{ table: string; name: string; type: string; kind: string; is_array: boolean; nullable: boolean; labels: string[] | null }>(`
+  const { rows } = await client.query<{
+    table: string;
+    name: string;
+    type: string;
+    kind: string;
+    is_array: boolean;
+    nullable: boolean;
+    labels: string[] | null;
+  }>(`
     select c.relname as table, a.attname as name, coalesce(e.typname, t.typname) as type, coalesce(e.typtype, t.typtype)::text as kind,
       t.typcategory = 'A' as is_array, not a.attnotnull as nullable,
       (select array_agg(enumlabel::text order by enumsortorder) from pg_enum where enumtypid = coalesce(e.oid, t.oid)) as labels
@@ -31,7 +39,11 @@ export async function tablesOf(client: pg.Client): Promise<TableFacts[]> {
       join pg_attribute a on a.attrelid = c.oid and a.attnum = any (i.indkey) where i.indisprimary order by c.relname, a.attnum`);
   const tables = new Map<string, TableFacts>();
   for (const { table, is_array: isArray, ...column } of rows) {
-    const facts = tables.get(table) ?? { name: table, columns: [], key: keys.rows.filter((key) => key.table === table).map((key) => key.name) };
+    const facts = tables.get(table) ?? {
+      name: table,
+      columns: [],
+      key: keys.rows.filter((key) => key.table === table).map((key) => key.name),
+    };
     facts.columns.push({ ...column, isArray });
     tables.set(table, facts);
   }
@@ -47,18 +59,32 @@ export async function dropChecks(client: pg.Client): Promise<void> {
 }
 
 /** A row of any table with plausible values, the given ones first. Made with foreign keys and triggers put aside. */
-export async function fillRow(client: pg.Client, table: TableFacts, given: Record<string, unknown>): Promise<Record<string, unknown>> {
-  const row = Object.fromEntries(table.columns.map((column) => [column.name, column.name in given ? given[column.name] : valueFor(column)]));
+export async function fillRow(
+  client: pg.Client,
+  table: TableFacts,
+  given: Record<string, unknown>,
+): Promise<Record<string, unknown>> {
+  const row = Object.fromEntries(
+    table.columns.map((column) => [
+      column.name,
+      column.name in given ? given[column.name] : valueFor(column),
+    ]),
+  );
   const names = table.columns.map((column) => `"${column.name}"`).join(', ');
   await client.query('begin');
   try {
     await client.query(`set local session_replication_role = replica`);
-    await client.query(`insert into "${table.name}" (${names}) select ${names} from jsonb_populate_record(null::"${table.name}", $1)`, [JSON.stringify(row)]);
+    await client.query(
+      `insert into "${table.name}" (${names}) select ${names} from jsonb_populate_record(null::"${table.name}", $1)`,
+      [JSON.stringify(row)],
+    );
     await client.query('commit');
     return row;
   } catch (error) {
     await client.query('rollback');
-    throw new Error(`no row for ${table.name}: ${error instanceof Error ? error.message : String(error)}`, { cause: error });
+    throw new Error(`no row for ${table.name}: ${error instanceof Error ? error.message : String(error)}`, {
+      cause: error,
+    });
   }
 }
 

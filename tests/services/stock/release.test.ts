@@ -21,7 +21,14 @@ const base = openDatabase();
 const ALL = ['lead', 'inspector', 'office', 'admin'] as const;
 
 /** A batch of one line of 10, counted in, with a certificate signed for `covered` of them. */
-async function proved(world: World, { covered = 10, unitPriceMinor = 0, processes }: { covered?: number; unitPriceMinor?: number; processes?: Parameters<typeof makePart>[1] } = {}) {
+async function proved(
+  world: World,
+  {
+    covered = 10,
+    unitPriceMinor = 0,
+    processes,
+  }: { covered?: number; unitPriceMinor?: number; processes?: Parameters<typeof makePart>[1] } = {},
+) {
   await givePassword(base.owner, world.userId);
   return world.as(ALL, async (ctx) => {
     const part = await makePart(ctx, processes);
@@ -39,7 +46,9 @@ test('proved pieces of a settled batch go to stock, are audited, and the batch i
   const world = await makeWorld(base.db, base.owner);
   const { batch, lot, lineId, locationId } = await proved(world);
   expect(await world.as(['lead'], (ctx) => stageNow(ctx, batch.id))).toBe('settled');
-  await world.as(['inspector'], (ctx) => releasePieces(ctx, { batchId: batch.id, lines: [{ lineId, pieces: 10, locationId }] }));
+  await world.as(['inspector'], (ctx) =>
+    releasePieces(ctx, { batchId: batch.id, lines: [{ lineId, pieces: 10, locationId }] }),
+  );
   await world.as(['lead'], async (ctx) => {
     expect(await placesOf(ctx, lot.id)).toEqual({ stock: 10 });
     expect(await stageNow(ctx, batch.id)).toBe('stocked');
@@ -50,8 +59,14 @@ test('proved pieces of a settled batch go to stock, are audited, and the batch i
 test('40 of 41 signed: the one that no paper covers stays', async () => {
   const world = await makeWorld(base.db, base.owner);
   const { batch, lineId, locationId } = await proved(world, { covered: 9 });
-  const release = (pieces: number) => world.as(['lead'], (ctx) => releasePieces(ctx, { batchId: batch.id, lines: [{ lineId, pieces, locationId }] }));
-  await expect(release(10)).rejects.toMatchObject({ code: 'bad_input', details: { fields: [{ field: 'lines.0.pieces' }] } });
+  const release = (pieces: number) =>
+    world.as(['lead'], (ctx) =>
+      releasePieces(ctx, { batchId: batch.id, lines: [{ lineId, pieces, locationId }] }),
+    );
+  await expect(release(10)).rejects.toMatchObject({
+    code: 'bad_input',
+    details: { fields: [{ field: 'lines.0.pieces' }] },
+  });
   await release(9);
   await expect(release(1)).rejects.toMatchObject({ code: 'bad_input' });
 });
@@ -59,10 +74,16 @@ test('40 of 41 signed: the one that no paper covers stays', async () => {
 test('unpaid pieces stay; a waiver lets them pass', async () => {
   const world = await makeWorld(base.db, base.owner);
   const { batch, lineId, locationId } = await proved(world, { unitPriceMinor: 500 });
-  const release = () => world.as(['lead'], (ctx) => releasePieces(ctx, { batchId: batch.id, lines: [{ lineId, pieces: 10, locationId }] }));
+  const release = () =>
+    world.as(['lead'], (ctx) =>
+      releasePieces(ctx, { batchId: batch.id, lines: [{ lineId, pieces: 10, locationId }] }),
+    );
   await expect(release()).rejects.toMatchObject({ code: 'bad_input' });
   await world.as(['admin'], async (ctx) => {
-    await ctx.tx.update(batches).set({ paymentWaivedAt: ctx.now, paymentWaivedReason: 'agreed' }).where(eq(batches.id, batch.id));
+    await ctx.tx
+      .update(batches)
+      .set({ paymentWaivedAt: ctx.now, paymentWaivedReason: 'agreed' })
+      .where(eq(batches.id, batch.id));
     await refreshStanding(ctx, batch.id);
   });
   await release();
@@ -70,8 +91,12 @@ test('unpaid pieces stay; a waiver lets them pass', async () => {
 
 test('pieces with a further outside step go on to wait for it', async () => {
   const world = await makeWorld(base.db, base.owner);
-  const { batch, lot, part, lineId } = await proved(world, { processes: { processes: ['solution_heat_treat_and_age', 'anodize'] } });
-  await world.as(['lead'], (ctx) => releasePieces(ctx, { batchId: batch.id, lines: [{ lineId, pieces: 10, locationId: null }] }));
+  const { batch, lot, part, lineId } = await proved(world, {
+    processes: { processes: ['solution_heat_treat_and_age', 'anodize'] },
+  });
+  await world.as(['lead'], (ctx) =>
+    releasePieces(ctx, { batchId: batch.id, lines: [{ lineId, pieces: 10, locationId: null }] }),
+  );
   await world.as(['lead'], async (ctx) => {
     expect(await placesOf(ctx, lot.id)).toEqual({ making: 10 });
     expect(part.stepIds).toHaveLength(2);
@@ -81,7 +106,10 @@ test('pieces with a further outside step go on to wait for it', async () => {
 test('two presses at once release once', async () => {
   const world = await makeWorld(base.db, base.owner);
   const { batch, lot, lineId, locationId } = await proved(world);
-  const press = () => world.as(['lead'], (ctx) => releasePieces(ctx, { batchId: batch.id, lines: [{ lineId, pieces: 10, locationId }] }));
+  const press = () =>
+    world.as(['lead'], (ctx) =>
+      releasePieces(ctx, { batchId: batch.id, lines: [{ lineId, pieces: 10, locationId }] }),
+    );
   const outcomes = await Promise.allSettled([press(), press()]);
   expect(outcomes.filter((one) => one.status === 'fulfilled')).toHaveLength(1);
   expect(await world.as(['lead'], (ctx) => placesOf(ctx, lot.id))).toEqual({ stock: 10 });
@@ -91,16 +119,32 @@ test('an auditor may not release, and another shop is told that the batch does n
   const [world, stranger] = [await makeWorld(base.db, base.owner), await makeWorld(base.db, base.owner)];
   const { batch, lineId, locationId } = await proved(world);
   const input = { batchId: batch.id, lines: [{ lineId, pieces: 1, locationId }] };
-  await expect(world.as(['auditor'], (ctx) => releasePieces(ctx, input))).rejects.toMatchObject({ code: 'not_allowed' });
-  await expect(stranger.as(['lead'], (ctx) => releasePieces(ctx, input))).rejects.toMatchObject({ code: 'not_found' });
+  await expect(world.as(['auditor'], (ctx) => releasePieces(ctx, input))).rejects.toMatchObject({
+    code: 'not_allowed',
+  });
+  await expect(stranger.as(['lead'], (ctx) => releasePieces(ctx, input))).rejects.toMatchObject({
+    code: 'not_found',
+  });
 });
 
 test('only what an assembly needs is fitted, and its readiness moves', async () => {
   const world = await makeWorld(base.db, base.owner);
   const { batch, lot, part, lineId, locationId } = await proved(world);
-  const assembly = await world.as(['lead'], (ctx) => createAssembly(ctx, { name: 'Left float', neededOn: null, note: null, needs: [{ partNumber: part.number, pieces: 6 }] }));
-  await world.as(['lead'], (ctx) => releasePieces(ctx, { batchId: batch.id, lines: [{ lineId, pieces: 10, locationId }] }));
-  const fit = (pieces: number) => world.as(['lead'], (ctx) => fitPieces(ctx, { lotId: lot.id, locationId, assemblyId: assembly.id, pieces }));
+  const assembly = await world.as(['lead'], (ctx) =>
+    createAssembly(ctx, {
+      name: 'Left float',
+      neededOn: null,
+      note: null,
+      needs: [{ partNumber: part.number, pieces: 6 }],
+    }),
+  );
+  await world.as(['lead'], (ctx) =>
+    releasePieces(ctx, { batchId: batch.id, lines: [{ lineId, pieces: 10, locationId }] }),
+  );
+  const fit = (pieces: number) =>
+    world.as(['lead'], (ctx) =>
+      fitPieces(ctx, { lotId: lot.id, locationId, assemblyId: assembly.id, pieces }),
+    );
   await expect(fit(7)).rejects.toMatchObject({ code: 'bad_input' });
   await fit(6);
   await world.as(['lead'], async (ctx) => {

@@ -3,19 +3,58 @@ import { expect, test } from 'vitest';
 import { approvalStanding, type Approval } from '@/lib/batches/approval';
 import { canOverride, checkBatch, type CheckedLine, type CheckFacts } from '@/lib/batches/checks';
 
-const step = { process: 'anodize', specification: 'MIL-PRF-8625', specificationRevision: 'F', classType: 'type II class 1' } as const;
-const approval: Approval = { reference: 'AP-7', processes: ['anodize'], specifications: [], validFrom: '2026-01-01', validTo: '2026-12-31', withdrawnAt: null };
-const line: CheckedLine = { id: 'line-1', lineNo: 1, lotNumber: 'L-0001', partNumber: 'P-1', partRevision: 'A', partSuperseded: false, step, unitPriceMinor: 500, requirements: 2 };
+const step = {
+  process: 'anodize',
+  specification: 'MIL-PRF-8625',
+  specificationRevision: 'F',
+  classType: 'type II class 1',
+} as const;
+const approval: Approval = {
+  reference: 'AP-7',
+  processes: ['anodize'],
+  specifications: [],
+  validFrom: '2026-01-01',
+  validTo: '2026-12-31',
+  withdrawnAt: null,
+};
+const line: CheckedLine = {
+  id: 'line-1',
+  lineNo: 1,
+  lotNumber: 'L-0001',
+  partNumber: 'P-1',
+  partRevision: 'A',
+  partSuperseded: false,
+  step,
+  unitPriceMinor: 500,
+  requirements: 2,
+};
 
-const facts = (given: { batch?: Partial<CheckFacts['batch']>; processor?: Partial<CheckFacts['processor']>; lines?: readonly CheckedLine[] } = {}): CheckFacts => ({
+const facts = (
+  given: {
+    batch?: Partial<CheckFacts['batch']>;
+    processor?: Partial<CheckFacts['processor']>;
+    lines?: readonly CheckedLine[];
+  } = {},
+): CheckFacts => ({
   zone: 'UTC',
   now: new Date('2026-06-17T12:00:00Z'),
   today: '2026-06-17',
-  batch: { ...step, number: 'B-0001', wantedBackOn: '2026-07-01', leavesOn: null, putAsideAt: null, lotMinimumMinor: 0, certificationFeeMinor: 0, requirements: 0, ...given.batch },
+  batch: {
+    ...step,
+    number: 'B-0001',
+    wantedBackOn: '2026-07-01',
+    leavesOn: null,
+    putAsideAt: null,
+    lotMinimumMinor: 0,
+    certificationFeeMinor: 0,
+    requirements: 0,
+    ...given.batch,
+  },
   processor: { id: 'processor-1', name: 'Ostrow', active: true, approvals: [approval], ...given.processor },
   lines: given.lines ?? [line],
 });
-const codes = (given: Parameters<typeof facts>[0]) => checkBatch(facts(given)).findings.map((finding) => [finding.level, finding.code]);
+const codes = (given: Parameters<typeof facts>[0]) =>
+  checkBatch(facts(given)).findings.map((finding) => [finding.level, finding.code]);
 
 test('a batch with nothing wrong says what was looked at', () => {
   const { findings, met } = checkBatch(facts());
@@ -27,18 +66,46 @@ test.each([
   ['an empty batch', { lines: [] }, 'empty_batch'],
   ['a processor one no longer works with', { processor: { active: false } }, 'processor_inactive'],
   ['no approval', { processor: { approvals: [] } }, 'processor_not_approved'],
-  ['an approval for another process', { processor: { approvals: [{ ...approval, processes: ['cadmium_plate'] }] } }, 'processor_not_approved'],
-  ['an approval for another specification', { processor: { approvals: [{ ...approval, specifications: ['AMS 2471'] }] } }, 'processor_not_approved'],
-  ['an approval that ended yesterday', { processor: { approvals: [{ ...approval, validTo: '2026-06-16' }] } }, 'processor_not_approved'],
-  ['an approval that begins tomorrow', { processor: { approvals: [{ ...approval, validFrom: '2026-06-18' }] } }, 'processor_not_approved'],
-  ['a withdrawn approval', { processor: { approvals: [{ ...approval, withdrawnAt: new Date('2026-06-01') }] } }, 'processor_not_approved'],
-  ['a line whose route says another step', { lines: [{ ...line, step: { ...step, specificationRevision: 'E' } }] }, 'line_of_other_step'],
+  [
+    'an approval for another process',
+    { processor: { approvals: [{ ...approval, processes: ['cadmium_plate'] }] } },
+    'processor_not_approved',
+  ],
+  [
+    'an approval for another specification',
+    { processor: { approvals: [{ ...approval, specifications: ['AMS 2471'] }] } },
+    'processor_not_approved',
+  ],
+  [
+    'an approval that ended yesterday',
+    { processor: { approvals: [{ ...approval, validTo: '2026-06-16' }] } },
+    'processor_not_approved',
+  ],
+  [
+    'an approval that begins tomorrow',
+    { processor: { approvals: [{ ...approval, validFrom: '2026-06-18' }] } },
+    'processor_not_approved',
+  ],
+  [
+    'a withdrawn approval',
+    { processor: { approvals: [{ ...approval, withdrawnAt: new Date('2026-06-01') }] } },
+    'processor_not_approved',
+  ],
+  [
+    'a line whose route says another step',
+    { lines: [{ ...line, step: { ...step, specificationRevision: 'E' } }] },
+    'line_of_other_step',
+  ],
 ] as const)('%s stops it', (_, given, code) => {
   expect(codes(given)).toContainEqual(['stop', code]);
 });
 
 test.each([
-  ['an approval that ends on the day it is wanted back', { processor: { approvals: [{ ...approval, validTo: '2026-07-01' }] } }, 'approval_ends_before_back'],
+  [
+    'an approval that ends on the day it is wanted back',
+    { processor: { approvals: [{ ...approval, validTo: '2026-07-01' }] } },
+    'approval_ends_before_back',
+  ],
   ['a line that asks for no proof', { lines: [{ ...line, requirements: 0 }] }, 'no_requirement'],
   ['a superseded drawing', { lines: [{ ...line, partSuperseded: true }] }, 'part_superseded'],
   ['no day to be back', { batch: { wantedBackOn: null } }, 'no_wanted_day'],
@@ -54,23 +121,34 @@ test('what holds for the whole batch is proof enough for its lines', () => {
 
 test('a lot minimum alone is a price; a line without one beside priced lines is only noted', () => {
   expect(codes({ batch: { lotMinimumMinor: 100 }, lines: [{ ...line, unitPriceMinor: 0 }] })).toEqual([]);
-  expect(codes({ lines: [line, { ...line, id: 'line-2', lineNo: 2, unitPriceMinor: 0 }] })).toEqual([['note', 'line_without_price']]);
+  expect(codes({ lines: [line, { ...line, id: 'line-2', lineNo: 2, unitPriceMinor: 0 }] })).toEqual([
+    ['note', 'line_without_price'],
+  ]);
 });
 
 test('what stops comes before what warns, and what warns before notes', () => {
-  const found = codes({ batch: { putAsideAt: new Date('2026-06-16'), wantedBackOn: null }, processor: { approvals: [] } });
+  const found = codes({
+    batch: { putAsideAt: new Date('2026-06-16'), wantedBackOn: null },
+    processor: { approvals: [] },
+  });
   expect(found.map(([level]) => level)).toEqual(['stop', 'warn', 'note']);
 });
 
 test('an empty batch cannot be let pass, a missing approval can', () => {
   const [empty] = checkBatch(facts({ lines: [] })).findings;
   const [unapproved] = checkBatch(facts({ processor: { approvals: [] } })).findings;
-  expect([empty, unapproved].map((finding) => finding !== undefined && canOverride(finding))).toEqual([false, true]);
+  expect([empty, unapproved].map((finding) => finding !== undefined && canOverride(finding))).toEqual([
+    false,
+    true,
+  ]);
 });
 
 test('of several approvals the one that stands longest counts, and a specification is known however it is spaced', () => {
   const longer = { ...approval, reference: 'AP-8', validTo: '2027-01-01', specifications: ['mil prf 8625'] };
   const asked = { process: 'anodize', specification: 'MIL-PRF-8625', on: '2026-06-17' } as const;
-  expect(approvalStanding([approval, longer], asked)).toMatchObject({ state: 'approved', approval: { reference: 'AP-8' } });
+  expect(approvalStanding([approval, longer], asked)).toMatchObject({
+    state: 'approved',
+    approval: { reference: 'AP-8' },
+  });
   expect(approvalStanding([], asked)).toEqual({ state: 'none' });
 });

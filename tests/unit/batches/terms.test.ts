@@ -5,7 +5,13 @@ import { expectedPrice } from '@/lib/batches/expected-price';
 import { reissueChanges, type StatedTerms } from '@/lib/batches/reissue-changes';
 
 test('pieces under the lot minimum are brought up to it; the fee for papers comes on top', () => {
-  expect(expectedPrice({ lotMinimumMinor: 18000, certificationFeeMinor: 2500, lines: [{ pieces: 10, unitPriceMinor: 400 }] })).toEqual({ workMinor: 4000, toMinimumMinor: 14000, certificationFeeMinor: 2500, totalMinor: 20500 });
+  expect(
+    expectedPrice({
+      lotMinimumMinor: 18000,
+      certificationFeeMinor: 2500,
+      lines: [{ pieces: 10, unitPriceMinor: 400 }],
+    }),
+  ).toEqual({ workMinor: 4000, toMinimumMinor: 14000, certificationFeeMinor: 2500, totalMinor: 20500 });
 });
 
 test('an empty order asks for no minimum', () => {
@@ -13,10 +19,16 @@ test('an empty order asks for no minimum', () => {
 });
 
 test('one more piece never makes an order cheaper, and never less than the minimum', () => {
-  const order = fc.record({ lotMinimumMinor: fc.nat(100_000), certificationFeeMinor: fc.nat(10_000), pieces: fc.integer({ min: 1, max: 500 }), each: fc.nat(5_000) });
+  const order = fc.record({
+    lotMinimumMinor: fc.nat(100_000),
+    certificationFeeMinor: fc.nat(10_000),
+    pieces: fc.integer({ min: 1, max: 500 }),
+    each: fc.nat(5_000),
+  });
   fc.assert(
     fc.property(order, ({ pieces, each, ...terms }) => {
-      const price = (count: number) => expectedPrice({ ...terms, lines: [{ pieces: count, unitPriceMinor: each }] }).totalMinor;
+      const price = (count: number) =>
+        expectedPrice({ ...terms, lines: [{ pieces: count, unitPriceMinor: each }] }).totalMinor;
       expect(price(pieces + 1)).toBeGreaterThanOrEqual(price(pieces));
       expect(price(pieces)).toBeGreaterThanOrEqual(terms.lotMinimumMinor + terms.certificationFeeMinor);
     }),

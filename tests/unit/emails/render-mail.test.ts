@@ -6,7 +6,8 @@ import { renderMail } from '@/lib/mail/render-mail';
 import { sampleMails } from './sample-mails';
 
 const TEMPLATES = Object.keys(MAIL_PROPS) as MailTemplate[];
-const rendered = (template: MailTemplate, changes: Record<string, unknown> = {}) => renderMail(template, { ...sampleMails[template], ...changes });
+const rendered = (template: MailTemplate, changes: Record<string, unknown> = {}) =>
+  renderMail(template, { ...sampleMails[template], ...changes });
 
 /** What a person reads in the HTML: no tags, no hidden preview, entities as the letters they are. */
 function wordsOf(html: string): string {
@@ -24,7 +25,8 @@ function wordsOf(html: string): string {
 }
 
 const lettersOf = (text: string): string[] => text.match(/[\p{L}\p{N}]+/gu) ?? [];
-const linksOf = (html: string) => [...html.matchAll(/href="([^"]+)"/g)].map(([, url = '']) => url.replaceAll('&amp;', '&'));
+const linksOf = (html: string) =>
+  [...html.matchAll(/href="([^"]+)"/g)].map(([, url = '']) => url.replaceAll('&amp;', '&'));
 
 describe.each(TEMPLATES)('the mail %s', (template) => {
   test('has a subject of one line, and says the same in both parts', async () => {
@@ -60,7 +62,10 @@ describe('names from outside', () => {
     const { html, text } = await rendered('dispatch');
     expect(html).toContain('Keel doubler &lt;aft&gt; &amp; more');
     expect(text).toContain('Keel doubler <aft> & more');
-    const notice = await rendered('message', { body: '<b>no</b>\n<script>alert(1)</script>', author: 'R & <i>A</i>' });
+    const notice = await rendered('message', {
+      body: '<b>no</b>\n<script>alert(1)</script>',
+      author: 'R & <i>A</i>',
+    });
     expect(notice.html).not.toContain('<script');
     expect(notice.html).not.toContain('<b>no');
     expect(notice.text).toContain('<script>alert(1)</script>');
@@ -105,7 +110,11 @@ describe('what a mail is about', () => {
     const toShop = await rendered('message');
     expect(toShop.subject).toBe('B-0419: a question from Ostrow Heat Treating');
     expect(toShop.text.replace(/\s+/g, ' ')).toContain('About line 2, FL-4410-12 D.');
-    const answer = await rendered('message', { to: 'processor', kind: 'answer', answers: { author: 'Ruth', body: 'Which drawing?' } });
+    const answer = await rendered('message', {
+      to: 'processor',
+      kind: 'answer',
+      answers: { author: 'Ruth', body: 'Which drawing?' },
+    });
     expect(answer.subject).toBe('B-0419: an answer from Heron Reach Floatworks');
     expect(answer.text).toContain('Ruth asked:');
     expect(answer.text).toContain('Which drawing?');
@@ -122,7 +131,9 @@ describe('what a mail is about', () => {
 
   test('moments are told in the zone of the reader', async () => {
     expect((await rendered('sign-in')).text.replace(/\s+/g, ' ')).toContain('Wed 17 Jun 07:42');
-    expect((await rendered('sign-in', { zone: 'UTC' })).text.replace(/\s+/g, ' ')).toContain('Wed 17 Jun 12:42');
+    expect((await rendered('sign-in', { zone: 'UTC' })).text.replace(/\s+/g, ' ')).toContain(
+      'Wed 17 Jun 12:42',
+    );
   });
 
   test('what a mail cannot be made of is refused with its field', async () => {

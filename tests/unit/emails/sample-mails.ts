@@ -16,7 +16,13 @@ const dispatch = {
   specification: 'AMS 2770R',
   wantedBackOn: '2026-06-30',
   lines: [
-    { lineNo: 1, part: 'FL-4418-03 C', description: 'Bulkhead web, sta 62, 2024 clad sheet, 0.032 in', loadNo: 1, pieces: 46 },
+    {
+      lineNo: 1,
+      part: 'FL-4418-03 C',
+      description: 'Bulkhead web, sta 62, 2024 clad sheet, 0.032 in',
+      loadNo: 1,
+      pieces: 46,
+    },
     { lineNo: 2, part: 'FL-4410-12 D', description: 'Keel doubler <aft> & more', loadNo: 2, pieces: 14 },
   ],
   cautions: ['Do not straighten later than 2 h after quench'],
@@ -35,14 +41,30 @@ const message = {
   answers: null,
   url: 'http://localhost:4600/batches/0198f7a0-0000-7000-8000-000000000000#messages',
 } as const;
-const account = { ...stated, name: 'Ines', url: 'http://localhost:4600/sign-in/link/abc', expiresAt: '2026-06-17T12:42:00Z' };
+const account = {
+  ...stated,
+  name: 'Ines',
+  url: 'http://localhost:4600/sign-in/link/abc',
+  expiresAt: '2026-06-17T12:42:00Z',
+};
 
 /** One of each mail, with names that a mail program must not take for markup. */
 export const sampleMails: { [T in MailTemplate]: MailGiven<T> } = {
   dispatch,
-  'dispatch-reissued': { ...dispatch, version: 2, changes: ['Line 2: 14 pieces instead of 12', 'Back by 30 Jun instead of 26 Jun'] },
+  'dispatch-reissued': {
+    ...dispatch,
+    version: 2,
+    changes: ['Line 2: 14 pieces instead of 12', 'Back by 30 Jun instead of 26 Jun'],
+  },
   'batch-cancelled': { ...ofBatch, reason: 'The drawing has changed.' },
-  'batch-link': { ...ofBatch, stage: 'at_processor', asked: dispatch.asked, specification: dispatch.specification, wantedBackOn: dispatch.wantedBackOn, url: dispatch.url },
+  'batch-link': {
+    ...ofBatch,
+    stage: 'at_processor',
+    asked: dispatch.asked,
+    specification: dispatch.specification,
+    wantedBackOn: dispatch.wantedBackOn,
+    url: dispatch.url,
+  },
   message,
   trouble: { ...message, kind: 'trouble' },
   remittance: {
@@ -60,7 +82,12 @@ export const sampleMails: { [T in MailTemplate]: MailGiven<T> } = {
     paidAt: '2026-06-17T12:00:00Z',
     reference: 'B-0419 26-1187',
   },
-  invitation: { ...account, organisation: 'Heron Reach Floatworks', inviter: 'Tobias', roles: ['lead', 'inspector', 'office'] },
+  invitation: {
+    ...account,
+    organisation: 'Heron Reach Floatworks',
+    inviter: 'Tobias',
+    roles: ['lead', 'inspector', 'office'],
+  },
   reset: account,
   'sign-in': account,
 };

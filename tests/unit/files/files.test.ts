@@ -17,14 +17,17 @@ describe('the name of a file', () => {
     ['Prüfzeugnis 41 Stück.pdf', 'Prüfzeugnis 41 Stück.pdf'],
   ])('%j is kept as %j', (sent, kept) => expect(safeFileName(sent)).toBe(kept));
 
-  test('a long name keeps its ending', () => expect(safeFileName(`${'x'.repeat(900)}.pdf`)).toMatch(/^x+….pdf$/));
+  test('a long name keeps its ending', () =>
+    expect(safeFileName(`${'x'.repeat(900)}.pdf`)).toMatch(/^x+….pdf$/));
 
   test('is one header line whatever it was, and means itself when it is read back', () =>
     fc.assert(
       fc.property(fc.string({ unit: 'binary', maxLength: 200 }), (sent) => {
         const header = contentDisposition('attachment', sent);
         expect(header).toMatch(/^attachment; filename="[\x20-\x7e]*"; filename\*=UTF-8''[\w.~%&$+^`{|}#-]+$/);
-        expect(safeFileName(decodeURIComponent(header.split("''")[1] ?? ''))).toBe(safeFileName(safeFileName(sent).toWellFormed()));
+        expect(safeFileName(decodeURIComponent(header.split("''")[1] ?? ''))).toBe(
+          safeFileName(safeFileName(sent).toWellFormed()),
+        );
       }),
     ));
 });
@@ -36,17 +39,37 @@ describe('what a file says it is', () => {
     ['chart', 'a.tsv', { kind: 'tsv' }],
     ['photo', 'IMG_1.heic', { kind: 'heic' }],
     ['concession', 'yes.eml', { kind: 'eml' }],
-  ] as const)('a %s named %s', (purpose, name, claimed) => expect(claimedKind({ purpose, name, mediaType: '', size: 1 })).toEqual(claimed));
+  ] as const)('a %s named %s', (purpose, name, claimed) =>
+    expect(claimedKind({ purpose, name, mediaType: '', size: 1 })).toEqual(claimed),
+  );
 
-  test('without an ending the browser is asked', () => expect(claimedKind({ purpose: 'photo', name: 'image', mediaType: 'image/jpeg', size: 1 })).toEqual({ kind: 'jpeg' }));
-  test('a script is nothing we take', () => expect(claimedKind({ purpose: 'photo', name: 'x.svg', mediaType: 'image/png', size: 1 })).toHaveProperty('refusal'));
-  test('nobody sends a traveller', () => expect(claimedKind({ purpose: 'traveller', name: 'x.pdf', mediaType: '', size: 1 })).toMatchObject({ refusal: expect.stringMatching(/made by Lotwright itself/) as string }));
-  test('the chooser offers the same kinds', () => expect(acceptedFiles('certificate')).toBe('.pdf,.png,image/png,.jpg,.jpeg,image/jpeg,.tif,.tiff,image/tiff'));
-  test.each([[12, '12 bytes'], [240 * 1024, '240 KB'], [1.8 * 1024 * 1024, '1.8 MB']])('%i is said as %s', (bytes, words) => expect(sizeWords(bytes)).toBe(words));
+  test('without an ending the browser is asked', () =>
+    expect(claimedKind({ purpose: 'photo', name: 'image', mediaType: 'image/jpeg', size: 1 })).toEqual({
+      kind: 'jpeg',
+    }));
+  test('a script is nothing we take', () =>
+    expect(claimedKind({ purpose: 'photo', name: 'x.svg', mediaType: 'image/png', size: 1 })).toHaveProperty(
+      'refusal',
+    ));
+  test('nobody sends a traveller', () =>
+    expect(claimedKind({ purpose: 'traveller', name: 'x.pdf', mediaType: '', size: 1 })).toMatchObject({
+      refusal: expect.stringMatching(/made by Lotwright itself/) as string,
+    }));
+  test('the chooser offers the same kinds', () =>
+    expect(acceptedFiles('certificate')).toBe(
+      '.pdf,.png,image/png,.jpg,.jpeg,image/jpeg,.tif,.tiff,image/tiff',
+    ));
+  test.each([
+    [12, '12 bytes'],
+    [240 * 1024, '240 KB'],
+    [1.8 * 1024 * 1024, '1.8 MB'],
+  ])('%i is said as %s', (bytes, words) => expect(sizeWords(bytes)).toBe(words));
 });
 
 describe('what a file is', () => {
-  const mail = Buffer.from('From: a@b.test\r\nDate: Thu, 16 Apr 2026 08:00:00 +0000\r\nSubject: concession\r\n\r\nUse as is.');
+  const mail = Buffer.from(
+    'From: a@b.test\r\nDate: Thu, 16 Apr 2026 08:00:00 +0000\r\nSubject: concession\r\n\r\nUse as is.',
+  );
   test.each([
     ['a PDF behind a line of the scanner', Buffer.from('\r\nscan\r\n%PDF-1.4'), 'pdf'],
     ['UTF-16 text', Buffer.from('\ufefftime,C', 'utf16le'), 'text'],

@@ -20,7 +20,9 @@ test.each<[string, Quantity, number]>([
   ['1.78 ft²', 'area', 165_367.4112],
   ['12 sq in', 'area', 7741.92],
   ['1650 cm2', 'area', 165_000],
-])('%s is read as %s: %d', (typed, quantity, value) => expect(readMeasure(typed, quantity, 'It')).toEqual({ ok: true, value, entered: typed }));
+])('%s is read as %s: %d', (typed, quantity, value) =>
+  expect(readMeasure(typed, quantity, 'It')).toEqual({ ok: true, value, entered: typed }),
+);
 
 test.each<[string, Quantity, RegExp]>([
   ['0.063', 'length', /^Thickness needs its unit. Write it like 0.040 in or 1 mm.$/],
@@ -33,10 +35,17 @@ test.each<[string, Quantity, RegExp]>([
   ['1 kg', 'length', /unit that is not known here: kg/],
   ['1 gauge', 'length', /gauge/],
   ['99999999999 m', 'length', /larger than any part/],
-])('%s is refused as %s', (typed, quantity, message) => expect(readMeasure(typed, quantity, 'Thickness')).toMatchObject({ ok: false, message: expect.stringMatching(message) as string }));
+])('%s is refused as %s', (typed, quantity, message) =>
+  expect(readMeasure(typed, quantity, 'Thickness')).toMatchObject({
+    ok: false,
+    message: expect.stringMatching(message) as string,
+  }),
+);
 
-test('what was typed is kept, but for its spaces', () => expect(readMeasure('  0.040   in ', 'length', 'It')).toMatchObject({ entered: '0.040 in' }));
-test('the base unit is said', () => expect([inBaseUnit(1.016, 'length'), inBaseUnit(1133.9809, 'mass')]).toEqual(['1.016 mm', '1,134 g']));
+test('what was typed is kept, but for its spaces', () =>
+  expect(readMeasure('  0.040   in ', 'length', 'It')).toMatchObject({ entered: '0.040 in' }));
+test('the base unit is said', () =>
+  expect([inBaseUnit(1.016, 'length'), inBaseUnit(1133.9809, 'mass')]).toEqual(['1.016 mm', '1,134 g']));
 
 test('inches and millimetres of the same length are the same', () =>
   fc.assert(

@@ -50,7 +50,9 @@ test('made again it is the same to the byte; stated at another time it is not', 
   const first = await renderPaper(sampleTraveller(), tokenOf);
   await new Promise((resolve) => setTimeout(resolve, 1100));
   expect((await renderPaper(sampleTraveller(), tokenOf)).equals(first)).toBe(true);
-  expect((await renderPaper(sampleTraveller({ statedAt: '2026-04-17T14:13:00.000Z' }), tokenOf)).equals(first)).toBe(false);
+  expect(
+    (await renderPaper(sampleTraveller({ statedAt: '2026-04-17T14:13:00.000Z' }), tokenOf)).equals(first),
+  ).toBe(false);
   const order = await renderPaper(sampleOrder(), tokenOf);
   expect((await renderPaper(sampleOrder(), tokenOf)).equals(order)).toBe(true);
 });
@@ -69,7 +71,14 @@ test('what an admin let pass, and what changed, is printed', async () => {
         documentVersion: 2,
         paper: 'a4',
         changes: ['wanted back Thu 30 Apr, was Mon 27 Apr'],
-        overrides: [{ what: 'sent although no approval for this step stands today', reason: 'The renewed approval is in the post.', by: 'Marek Dole', at: '2026-04-17T14:00:00.000Z' }],
+        overrides: [
+          {
+            what: 'sent although no approval for this step stands today',
+            reason: 'The renewed approval is in the post.',
+            by: 'Marek Dole',
+            at: '2026-04-17T14:00:00.000Z',
+          },
+        ],
       }),
       tokenOf,
     ),
@@ -82,11 +91,26 @@ test('what an admin let pass, and what changed, is printed', async () => {
 test('the order states prices, the minimum and what the invoice should say', async () => {
   const [page = ''] = await readPdf(await renderPaper(sampleOrder(), tokenOf));
   // 60 pieces at 2.45 are 147.00; to the minimum 33.00; certificates 25.00.
-  for (const said of ['Purchase order', 'TS-1187', '147.00', 'to the lot minimum of 180.00', '33.00', '25.00', '205.00', 'Expected invoice, USD']) expect(page).toContain(said);
+  for (const said of [
+    'Purchase order',
+    'TS-1187',
+    '147.00',
+    'to the lot minimum of 180.00',
+    '33.00',
+    '25.00',
+    '205.00',
+    'Expected invoice, USD',
+  ])
+    expect(page).toContain(said);
 });
 
 test('letters beyond western Europe are drawn', async () => {
-  const [page = ''] = await readPdf(await renderPaper(sampleTraveller({ shop: { name: 'Żółta Łódź', address: ['Großstraße 1'], phone: null } }), tokenOf));
+  const [page = ''] = await readPdf(
+    await renderPaper(
+      sampleTraveller({ shop: { name: 'Żółta Łódź', address: ['Großstraße 1'], phone: null } }),
+      tokenOf,
+    ),
+  );
   // Letters of the second font file come as pieces of their own.
   expect(page.replaceAll(' ', '')).toContain('ŻółtaŁódź');
 });

@@ -20,9 +20,15 @@ export default async function LinkPage({ params, searchParams }: LinkPageProps) 
   const { state, batch } = await readOnServer(readBatchLinkEndpoint, { token });
   if (batch === null || state !== 'open') notFound();
   const { actor, tenant } = await viewer();
-  const mayAlready = tenant.kind === 'processor' && tenant.processorId === batch.processorId && (tenant.batchId ?? batch.id) === batch.id;
+  const mayAlready =
+    tenant.kind === 'processor' &&
+    tenant.processorId === batch.processorId &&
+    (tenant.batchId ?? batch.id) === batch.id;
   return (
-    <PortalShell shop={batch.shop} call={batch.shopPhone === null ? undefined : { says: 'Call', phone: batch.shopPhone }}>
+    <PortalShell
+      shop={batch.shop}
+      call={batch.shopPhone === null ? undefined : { says: 'Call', phone: batch.shopPhone }}
+    >
       <LinkOpen
         batch={batch}
         now={new Date()}
@@ -35,4 +41,5 @@ export default async function LinkPage({ params, searchParams }: LinkPageProps) 
   );
 }
 
-const signedInAs = ({ actor }: Identity): string | undefined => (actor.kind === 'person' ? actor.name : undefined);
+const signedInAs = ({ actor }: Identity): string | undefined =>
+  actor.kind === 'person' ? actor.name : undefined;

@@ -11,7 +11,8 @@ export const metadata: Metadata = { title: 'Choose a new password', referrer: 'n
 
 export default async function ResetPage({ params }: { params: Promise<{ token: string }> }) {
   const { token } = await params;
-  const link = token.length < 20 || token.length > 200 ? null : await readOnServer(readMailedLinkEndpoint, { token });
+  const link =
+    token.length < 20 || token.length > 200 ? null : await readOnServer(readMailedLinkEndpoint, { token });
   if (link?.state !== 'open' || link.purpose !== 'reset') {
     return (
       <PublicPage title="Choose a new password" lead="This link was used, or its time is over.">
@@ -24,7 +25,10 @@ export default async function ResetPage({ params }: { params: Promise<{ token: s
     );
   }
   return (
-    <PublicPage title="Choose a new password" lead={`For ${link.name ?? ''}, ${link.email ?? ''}. Every session of yours ends and this browser signs in anew.`}>
+    <PublicPage
+      title="Choose a new password"
+      lead={`For ${link.name ?? ''}, ${link.email ?? ''}. Every session of yours ends and this browser signs in anew.`}
+    >
       <ResetForm token={token} email={link.email ?? ''} signIn={signInWithForm} />
     </PublicPage>
   );

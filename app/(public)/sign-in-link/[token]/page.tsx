@@ -18,7 +18,8 @@ interface Props {
 /** Opening it uses nothing up: mail scanners open every address. The press does. */
 export default async function SignInLinkPage({ params, searchParams }: Props) {
   const { token } = await params;
-  const link = token.length < 20 || token.length > 200 ? null : await readOnServer(readMailedLinkEndpoint, { token });
+  const link =
+    token.length < 20 || token.length > 200 ? null : await readOnServer(readMailedLinkEndpoint, { token });
   if (link?.state !== 'open' || link.purpose !== 'sign_in') {
     return (
       <PublicPage title="Sign in" lead="This link was used, or its time is over.">
@@ -32,7 +33,11 @@ export default async function SignInLinkPage({ params, searchParams }: Props) {
   }
   return (
     <PublicPage title="Sign in" lead={`This link signs in ${link.name ?? ''}, ${link.email ?? ''}, once.`}>
-      <OneButtonForm action={signInWithLink} fields={{ token, next: safeNext((await searchParams).next) }} busyLabel="Signing in">
+      <OneButtonForm
+        action={signInWithLink}
+        fields={{ token, next: safeNext((await searchParams).next) }}
+        busyLabel="Signing in"
+      >
         {`Sign in as ${link.name ?? ''}`}
       </OneButtonForm>
     </PublicPage>

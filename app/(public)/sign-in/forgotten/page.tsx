@@ -7,7 +7,10 @@ export const metadata: Metadata = { title: 'Choose a new password' };
 
 export default function ForgottenPage() {
   return (
-    <PublicPage title="Choose a new password" lead="A link comes by mail. The password you have now holds until you choose another.">
+    <PublicPage
+      title="Choose a new password"
+      lead="A link comes by mail. The password you have now holds until you choose another."
+    >
       <MailMeForm for="reset" />
     </PublicPage>
   );

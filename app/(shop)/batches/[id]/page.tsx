@@ -2,7 +2,13 @@ import type { Metadata } from 'next';
 
 import { ask, Prefetched, readOnServer } from '@/app/_kit/prefetch';
 import { BatchScreen } from '@/components/batches/batch-screen';
-import { getBatchChecksEndpoint, getBatchEndpoint, getBatchLinesEndpoint, getTravellerEndpoint, listStepProcessorsEndpoint } from '@/lib/batches/endpoints';
+import {
+  getBatchChecksEndpoint,
+  getBatchEndpoint,
+  getBatchLinesEndpoint,
+  getTravellerEndpoint,
+  listStepProcessorsEndpoint,
+} from '@/lib/batches/endpoints';
 import { getMeEndpoint } from '@/lib/session/endpoints';
 
 type Props = { params: Promise<{ id: string }> };

@@ -16,7 +16,13 @@ export async function generateMetadata({ params }: Props): Promise<Metadata> {
 export default async function LotPage({ params }: Props) {
   const lotId = readId((await params).id);
   return (
-    <Prefetched queries={[ask(getMeEndpoint, {}), ask(getLotEndpoint, { lotId }), ask(listMovementsEndpoint, { lotId })]}>
+    <Prefetched
+      queries={[
+        ask(getMeEndpoint, {}),
+        ask(getLotEndpoint, { lotId }),
+        ask(listMovementsEndpoint, { lotId }),
+      ]}
+    >
       <LotScreen lotId={lotId} />
     </Prefetched>
   );

@@ -12,7 +12,9 @@ export default async function NewLotPage({ searchParams }: { searchParams: Promi
   const asked = Id.safeParse((await searchParams).part);
   const partId = asked.success ? asked.data : null;
   return (
-    <Prefetched queries={[ask(getMeEndpoint, {}), ...(partId === null ? [] : [ask(getPartEndpoint, { partId })])]}>
+    <Prefetched
+      queries={[ask(getMeEndpoint, {}), ...(partId === null ? [] : [ask(getPartEndpoint, { partId })])]}
+    >
       <NewLot key={partId} partId={partId} />
     </Prefetched>
   );

@@ -14,7 +14,13 @@ export default async function ProcessorPage({ params }: { params: Promise<{ proc
   const { processorId } = await params;
   if (!Id.safeParse(processorId).success) notFound();
   return (
-    <Prefetched queries={[ask(getProcessorEndpoint, { processorId }), ask(listBatchesEndpoint, { processorId, limit: 20 }), ask(getMeEndpoint, {})]}>
+    <Prefetched
+      queries={[
+        ask(getProcessorEndpoint, { processorId }),
+        ask(listBatchesEndpoint, { processorId, limit: 20 }),
+        ask(getMeEndpoint, {}),
+      ]}
+    >
       <ProcessorScreen processorId={processorId} now={new Date()} />
     </Prefetched>
   );

@@ -4,6 +4,10 @@ import { PayingMethod } from '@/components/payments/paying-method';
 
 export const metadata: Metadata = { title: 'How the shop pays' };
 
-export default async function PaymentsSettingsPage({ searchParams }: { searchParams: Promise<{ saved?: string }> }) {
+export default async function PaymentsSettingsPage({
+  searchParams,
+}: {
+  searchParams: Promise<{ saved?: string }>;
+}) {
   return <PayingMethod justSaved={(await searchParams).saved === '1'} />;
 }

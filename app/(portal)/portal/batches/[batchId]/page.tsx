@@ -24,19 +24,31 @@ export default async function PortalBatchPage({ params }: BatchPageProps) {
   const { batchId } = await params;
   const { actor } = await viewer();
   const { shop, contactName, number } = await readBatch(batchId);
-  const call = shop.phone === null ? undefined : { says: `Call ${contactName?.split(' ')[0] ?? 'the shop'}`, phone: shop.phone };
+  const call =
+    shop.phone === null
+      ? undefined
+      : { says: `Call ${contactName?.split(' ')[0] ?? 'the shop'}`, phone: shop.phone };
   return (
-    <PortalShell shop={shop.name} call={call} kept="What you answer here is kept on this device and sent when it is back.">
+    <PortalShell
+      shop={shop.name}
+      call={call}
+      kept="What you answer here is kept on this device and sent when it is back."
+    >
       {actor.kind === 'person' && (
         <a href="/portal" className="lw-word-button">
           All work
         </a>
       )}
-      <Prefetched queries={[ask(getPortalBatchEndpoint, { batchId }), ask(listPortalMessagesEndpoint, { batchId })]}>
+      <Prefetched
+        queries={[ask(getPortalBatchEndpoint, { batchId }), ask(listPortalMessagesEndpoint, { batchId })]}
+      >
         <PortalBatch batchId={batchId} now={new Date().toISOString()} />
       </Prefetched>
       {actor.kind === 'link' && (
-        <form action={signOutHere} className="no-print flex flex-wrap items-center gap-x-3 border-t border-rule pt-3 text-second text-quiet">
+        <form
+          action={signOutHere}
+          className="no-print flex flex-wrap items-center gap-x-3 border-t border-rule pt-3 text-second text-quiet"
+        >
           <span>This device is signed in for {number} only.</span>
           <Button type="submit" look="word">
             End it here

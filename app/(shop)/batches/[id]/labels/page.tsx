@@ -22,6 +22,16 @@ export default async function LabelsPage({ params, searchParams }: LabelsPagePro
   const { organisation } = await readOnServer(getMeEndpoint, {});
   const { rows } = await readOnServer(listReleasesEndpoint, { batchId: id });
   const wanted = typeof of === 'string' && of !== '' ? of.split(',') : null;
-  const labels = rows.filter((row) => wanted === null || wanted.includes(row.id)).map((release) => ({ release, code: qrPath(`${env.APP_URL}/lots/${release.lotId}`) }));
-  return <LabelSheet batchId={id} ofAll={rows.length} labels={labels} shop={organisation.name} clock={{ zone: organisation.zone, now: new Date() }} />;
+  const labels = rows
+    .filter((row) => wanted === null || wanted.includes(row.id))
+    .map((release) => ({ release, code: qrPath(`${env.APP_URL}/lots/${release.lotId}`) }));
+  return (
+    <LabelSheet
+      batchId={id}
+      ofAll={rows.length}
+      labels={labels}
+      shop={organisation.name}
+      clock={{ zone: organisation.zone, now: new Date() }}
+    />
+  );
 }

@@ -10,7 +10,13 @@ export const metadata: Metadata = { title: 'Re-issue' };
 export default async function ReissuePage({ params }: { params: Promise<{ id: string }> }) {
   const { id: batchId } = await params;
   return (
-    <Prefetched queries={[ask(getMeEndpoint, {}), ask(getBatchEndpoint, { batchId }), ask(getBatchLinesEndpoint, { batchId })]}>
+    <Prefetched
+      queries={[
+        ask(getMeEndpoint, {}),
+        ask(getBatchEndpoint, { batchId }),
+        ask(getBatchLinesEndpoint, { batchId }),
+      ]}
+    >
       <ReissueScreen batchId={batchId} />
     </Prefetched>
   );

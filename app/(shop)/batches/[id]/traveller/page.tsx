@@ -9,7 +9,13 @@ export const metadata: Metadata = { title: 'Traveller' };
 export default async function TravellerPage({ params }: { params: Promise<{ id: string }> }) {
   const { id: batchId } = await params;
   return (
-    <Prefetched queries={[ask(getBatchEndpoint, { batchId }), ask(getTravellerEndpoint, { batchId }), ask(listBatchDocumentsEndpoint, { batchId })]}>
+    <Prefetched
+      queries={[
+        ask(getBatchEndpoint, { batchId }),
+        ask(getTravellerEndpoint, { batchId }),
+        ask(listBatchDocumentsEndpoint, { batchId }),
+      ]}
+    >
       <TravellerScreen batchId={batchId} />
     </Prefetched>
   );

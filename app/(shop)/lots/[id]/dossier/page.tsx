@@ -11,7 +11,13 @@ export const metadata: Metadata = { title: 'Dossier' };
 export default async function DossierPage({ params }: { params: Promise<{ id: string }> }) {
   const lotId = readId((await params).id);
   return (
-    <Prefetched queries={[ask(getMeEndpoint, {}), ask(getDossierEndpoint, { lotId }), ask(listMadeDossiersEndpoint, { lotId })]}>
+    <Prefetched
+      queries={[
+        ask(getMeEndpoint, {}),
+        ask(getDossierEndpoint, { lotId }),
+        ask(listMadeDossiersEndpoint, { lotId }),
+      ]}
+    >
       <DossierScreen lotId={lotId} />
     </Prefetched>
   );
