@@ -2,7 +2,7 @@ import { and, count, eq, inArray, isNull, sql } from 'drizzle-orm';
 import type { z } from 'zod';
 
 import { batches, batchLines } from '@/db/schema/batches';
-import { receipts } from '@/db/schema/evidence';
+import { receipts } from '@/db/schema/receipts';
 import { balances } from '@/db/schema/lots';
 import { invoices } from '@/db/schema/money';
 import { recordAudit } from '@/lib/audit/record-audit';

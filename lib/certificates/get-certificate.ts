@@ -1,7 +1,8 @@
 import { and, asc, desc, eq, ne, sql } from 'drizzle-orm';
 
 import { batches, batchLines, requirements } from '@/db/schema/batches';
-import { certificates, charts, coverage, decisions, nonconformances, signatures } from '@/db/schema/evidence';
+import { certificates, charts, coverage, decisions, signatures } from '@/db/schema/evidence';
+import { nonconformances } from '@/db/schema/nonconformances';
 import { files } from '@/db/schema/files';
 import { balances } from '@/db/schema/lots';
 import { processors, shops } from '@/db/schema/organisations';

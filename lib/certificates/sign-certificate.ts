@@ -2,7 +2,8 @@ import { and, asc, eq, sql } from 'drizzle-orm';
 import type { z } from 'zod';
 
 import { batchLines, requirements } from '@/db/schema/batches';
-import { coverage, decisions, nonconformances, signatures } from '@/db/schema/evidence';
+import { coverage, decisions, signatures } from '@/db/schema/evidence';
+import { nonconformances } from '@/db/schema/nonconformances';
 import { files } from '@/db/schema/files';
 import { balances } from '@/db/schema/lots';
 import { shops } from '@/db/schema/organisations';

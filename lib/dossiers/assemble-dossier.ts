@@ -1,7 +1,7 @@
 import { and, eq, isNull } from 'drizzle-orm';
 import type { z } from 'zod';
 
-import { dossiers } from '@/db/schema/evidence';
+import { dossiers } from '@/db/schema/dossiers';
 import { recordAudit } from '@/lib/audit/record-audit';
 import { AppError } from '@/lib/errors';
 import { storeMadeFile } from '@/lib/files/store-made-file';

@@ -1,7 +1,7 @@
 import { and, eq, isNull } from 'drizzle-orm';
 
 import { inShopOf } from '@/db/client';
-import { dossierLinks } from '@/db/schema/evidence';
+import { dossierLinks } from '@/db/schema/dossiers';
 import { recordAudit } from '@/lib/audit/record-audit';
 import { authorize } from '@/lib/auth/authorize';
 import { shopOf, type Ctx } from '@/lib/auth/context';

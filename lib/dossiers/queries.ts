@@ -1,6 +1,6 @@
 import { desc, eq } from 'drizzle-orm';
 
-import { dossierLinks, dossiers } from '@/db/schema/evidence';
+import { dossierLinks, dossiers } from '@/db/schema/dossiers';
 import { recordAudit } from '@/lib/audit/record-audit';
 import { authorize } from '@/lib/auth/authorize';
 import { shopOf, type Ctx } from '@/lib/auth/context';

@@ -1,7 +1,7 @@
 import { eq } from 'drizzle-orm';
 
 import { inShopOf } from '@/db/client';
-import { dossierLinks } from '@/db/schema/evidence';
+import { dossierLinks } from '@/db/schema/dossiers';
 import { shops } from '@/db/schema/organisations';
 import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';

@@ -2,7 +2,7 @@ import { and, eq, inArray, sql } from 'drizzle-orm';
 import type { z } from 'zod';
 
 import { batchLines } from '@/db/schema/batches';
-import { dispositions, nonconformances } from '@/db/schema/evidence';
+import { dispositions, nonconformances } from '@/db/schema/nonconformances';
 import { pieces as namedPieces } from '@/db/schema/lots';
 import { recordAudit } from '@/lib/audit/record-audit';
 import { authorize } from '@/lib/auth/authorize';

@@ -1,4 +1,4 @@
-import { nonconformances } from '@/db/schema/evidence';
+import { nonconformances } from '@/db/schema/nonconformances';
 import { recordAudit } from '@/lib/audit/record-audit';
 import { shopOf, type Ctx } from '@/lib/auth/context';
 import { newId } from '@/lib/ids';

@@ -2,7 +2,8 @@ import { and, asc, eq, inArray, sql, type SQL } from 'drizzle-orm';
 import type { z } from 'zod';
 
 import { batches, batchLines, requirements } from '@/db/schema/batches';
-import { certificates, decisions, dispositions, nonconformances } from '@/db/schema/evidence';
+import { certificates, decisions } from '@/db/schema/evidence';
+import { dispositions, nonconformances } from '@/db/schema/nonconformances';
 import { files } from '@/db/schema/files';
 import { balances, lots, pieces as namedPieces } from '@/db/schema/lots';
 import { processors } from '@/db/schema/organisations';

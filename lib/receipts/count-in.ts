@@ -2,7 +2,7 @@ import { and, eq, inArray } from 'drizzle-orm';
 import type { z } from 'zod';
 
 import { messages } from '@/db/schema/batches';
-import { receiptLines, receiptPhotos, receipts } from '@/db/schema/evidence';
+import { receiptLines, receiptPhotos, receipts } from '@/db/schema/receipts';
 import { pieces as namedPieces } from '@/db/schema/lots';
 import { recordAudit } from '@/lib/audit/record-audit';
 import { authorize } from '@/lib/auth/authorize';

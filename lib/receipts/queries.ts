@@ -1,7 +1,7 @@
 import { and, asc, desc, eq, inArray, sql } from 'drizzle-orm';
 
 import { batches, batchLines, batchLinks } from '@/db/schema/batches';
-import { receiptLines, receiptPhotos, receipts } from '@/db/schema/evidence';
+import { receiptLines, receiptPhotos, receipts } from '@/db/schema/receipts';
 import { files } from '@/db/schema/files';
 import { pieces as namedPieces } from '@/db/schema/lots';
 import { processors } from '@/db/schema/organisations';

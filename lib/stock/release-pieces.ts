@@ -1,7 +1,7 @@
 import { isNull } from 'drizzle-orm';
 import type { z } from 'zod';
 
-import { releases } from '@/db/schema/evidence';
+import { releases } from '@/db/schema/dossiers';
 import { locations } from '@/db/schema/lots';
 import { readReadiness } from '@/lib/assemblies/readiness';
 import { recordAudit } from '@/lib/audit/record-audit';

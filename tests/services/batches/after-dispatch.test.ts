@@ -9,7 +9,8 @@ import {
   overrides,
   requirements,
 } from '@/db/schema/batches';
-import { certificates, decisions, receipts } from '@/db/schema/evidence';
+import { certificates, decisions } from '@/db/schema/evidence';
+import { receipts } from '@/db/schema/receipts';
 import { files } from '@/db/schema/files';
 import { balances } from '@/db/schema/lots';
 import { invoices } from '@/db/schema/money';

@@ -1,7 +1,7 @@
 import { eq } from 'drizzle-orm';
 import { expect, test } from 'vitest';
 
-import { nonconformances } from '@/db/schema/evidence';
+import { nonconformances } from '@/db/schema/nonconformances';
 import type { Ctx } from '@/lib/auth/context';
 import { newId } from '@/lib/ids';
 import { disposeNonconformance } from '@/lib/nonconformances/dispose-nonconformance';

@@ -2,7 +2,8 @@ import { eq } from 'drizzle-orm';
 import { expect, test } from 'vitest';
 
 import { messages } from '@/db/schema/batches';
-import { nonconformances, receiptPhotos } from '@/db/schema/evidence';
+import { nonconformances } from '@/db/schema/nonconformances';
+import { receiptPhotos } from '@/db/schema/receipts';
 import { newId } from '@/lib/ids';
 import { countIn } from '@/lib/receipts/count-in';
 import { findForReceiving, getReceiving, listReceipts } from '@/lib/receipts/queries';
