@@ -3,11 +3,11 @@ import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 
 import { useRead } from '@/components/api/use-api';
-import { amountField, typedAmount } from '@/components/invoices/amount-field';
+import { typedAmount } from '@/components/invoices/amount-field';
 import { useClock } from '@/components/session/use-me';
 import { Button, ButtonLink } from '@/components/ui/button';
 import { Empty } from '@/components/ui/empty';
-import { DateField, NumberInput, TextArea, TextField } from '@/components/ui/field';
+import { DateField, NumberInput, TextArea } from '@/components/ui/field';
 import { showMessage } from '@/components/ui/message';
 import { PageHead } from '@/components/ui/page-head';
 import { MainAndSide, Section } from '@/components/ui/section';
@@ -23,18 +23,8 @@ import { reissueBatch } from '@/lib/batches/paper-contract';
 import { reissueChanges, type StatedTerms } from '@/lib/batches/reissue-changes';
 import { dayWords, type Clock } from '@/lib/day-words';
 
+import { amountFault, LimitFields, PriceFields, readAmount, type ReissueTyped } from './reissue-fields';
 import { useBatchWrite } from './use-batch-write';
-
-interface Typed {
-  wantedBackOn: string;
-  note: string;
-  minimum: string;
-  fee: string;
-  prices: Readonly<Record<string, string>>;
-  limits: Readonly<Record<string, { limit: string; unit: string }>>;
-}
-
-const Amount = amountField({ name: 'The amount' });
 
 /** What may still change of a batch that has left, beside the sentences that will say what is different. */
 export function ReissueScreen({ batchId }: { batchId: string }) {
@@ -69,7 +59,7 @@ function ReissueForm({
 }) {
   const router = useRouter();
   const clock = useClock();
-  const [typed, setTyped] = useState<Typed>({
+  const [typed, setTyped] = useState<ReissueTyped>({
     wantedBackOn: batch.wantedBackOn ?? '',
     note: batch.note ?? '',
     minimum: typedAmount(batch.lotMinimumMinor),
@@ -78,7 +68,7 @@ function ReissueForm({
     limits: {},
   });
   const { run, busy } = useBatchWrite(reissueBatch);
-  const set = (part: Partial<Typed>) => setTyped((was) => ({ ...was, ...part }));
+  const set = (part: Partial<ReissueTyped>) => setTyped((was) => ({ ...was, ...part }));
   const before: StatedTerms = {
     ...clock,
     wantedBackOn: batch.wantedBackOn,
@@ -159,59 +149,9 @@ function ReissueForm({
                 />
               </div>
             </Section>
-            <Section title="Prices" note="pieces and lots are frozen">
-              {lines.map((line) => {
-                const text = typed.prices[line.id] ?? typedAmount(line.unitPriceMinor);
-                return (
-                  <div key={line.id} className="flex flex-wrap items-start gap-4 border-b border-rule py-2">
-                    <span className="min-w-64 flex-1 pt-1">
-                      <span className="num font-semibold">{line.partNumber}</span> {line.partName},{' '}
-                      {line.pieces} pc
-                    </span>
-                    <NumberInput
-                      className="w-40"
-                      label={`Line ${line.lineNo}, each`}
-                      unit={batch.currency}
-                      value={text}
-                      error={amountFault(text)}
-                      onChange={(event) =>
-                        set({ prices: { ...typed.prices, [line.id]: event.currentTarget.value } })
-                      }
-                    />
-                  </div>
-                );
-              })}
-            </Section>
+            <PriceFields lines={lines} currency={batch.currency} typed={typed} set={set} />
             {requirements.length > 0 && (
-              <Section title="What must be proved" note="what a certificate was already compared with stays">
-                {requirements.map((one) => {
-                  const now = typed.limits[one.id] ?? one;
-                  const lineNo = lines.find((line) => line.id === one.lineId)?.lineNo;
-                  const change = (part: Partial<{ limit: string; unit: string }>) =>
-                    set({
-                      limits: { ...typed.limits, [one.id]: { limit: now.limit, unit: now.unit, ...part } },
-                    });
-                  const name = `${one.characteristic}${lineNo === undefined ? '' : `, line ${lineNo}`}`;
-                  return (
-                    <div key={one.id} className="flex flex-wrap items-start gap-3 border-b border-rule py-2">
-                      <TextField
-                        className="min-w-64 flex-1"
-                        label={name}
-                        mono
-                        value={now.limit}
-                        onChange={(event) => change({ limit: event.currentTarget.value })}
-                      />
-                      <TextField
-                        className="w-32"
-                        label="Unit"
-                        mono
-                        value={now.unit}
-                        onChange={(event) => change({ unit: event.currentTarget.value })}
-                      />
-                    </div>
-                  );
-                })}
-              </Section>
+              <LimitFields lines={lines} requirements={requirements} typed={typed} set={set} />
             )}
           </>
         }
@@ -244,28 +184,20 @@ function ReissueForm({
   );
 }
 
-const orNothing = (text: string) => (text.trim() === '' ? '0' : text);
-
-function amountFault(text: string): string | undefined {
-  const read = Amount.safeParse(orNothing(text));
-  return read.success ? undefined : read.error.issues[0]?.message;
-}
-
 /** The terms as typed; null while an amount cannot be read. */
-function termsTyped(before: StatedTerms, typed: Typed, clock: Clock): StatedTerms | null {
+function termsTyped(before: StatedTerms, typed: ReissueTyped, clock: Clock): StatedTerms | null {
   const amounts = [typed.minimum, typed.fee, ...Object.values(typed.prices)];
   if (amounts.some((text) => amountFault(text) !== undefined)) return null;
-  const read = (text: string) => Amount.parse(orNothing(text));
   return {
     ...clock,
     wantedBackOn: typed.wantedBackOn || null,
     note: typed.note.trim() || null,
-    lotMinimumMinor: read(typed.minimum),
-    certificationFeeMinor: read(typed.fee),
+    lotMinimumMinor: readAmount(typed.minimum),
+    certificationFeeMinor: readAmount(typed.fee),
     lines: before.lines.map((line) => ({
       ...line,
       unitPriceMinor:
-        typed.prices[line.id] === undefined ? line.unitPriceMinor : read(typed.prices[line.id] ?? ''),
+        typed.prices[line.id] === undefined ? line.unitPriceMinor : readAmount(typed.prices[line.id] ?? ''),
     })),
     requirements: before.requirements.map((one) => ({ ...one, ...typed.limits[one.id] })),
   };

@@ -137,42 +137,36 @@ export async function seedOrganisations(
   }): Promise<DemoProcessor> => {
     const id = newId();
     const email = `desk@${domain}`;
-    await owner
-      .insert(processors)
-      .values({
-        id,
-        name,
-        email,
-        phone: '555 0112',
-        address: ['Works Road', 'Tamarack Junction'],
-        zone: 'America/Los_Angeles',
-        createdAt: since,
-      });
+    await owner.insert(processors).values({
+      id,
+      name,
+      email,
+      phone: '555 0112',
+      address: ['Works Road', 'Tamarack Junction'],
+      zone: 'America/Los_Angeles',
+      createdAt: since,
+    });
     const desk = await person({ name: contact, email, roles: ['processor'], processorId: id });
     for (const [shop, reference] of [
       [shopId, 'Q-114'],
       [otherShopId, 'AP-7'],
     ] as const) {
-      await owner
-        .insert(shopProcessors)
-        .values({
-          shopId: shop,
-          processorId: id,
-          contactName: contact,
-          contactEmail: email,
-          createdAt: since,
-        });
-      await owner
-        .insert(approvals)
-        .values({
-          shopId: shop,
-          processorId: id,
-          reference: `${reference}-${id.slice(-3)}`,
-          processes: [...processes],
-          validFrom: dayOf(since),
-          validTo: dayOf(addDays(today, validDays)),
-          createdAt: since,
-        });
+      await owner.insert(shopProcessors).values({
+        shopId: shop,
+        processorId: id,
+        contactName: contact,
+        contactEmail: email,
+        createdAt: since,
+      });
+      await owner.insert(approvals).values({
+        shopId: shop,
+        processorId: id,
+        reference: `${reference}-${id.slice(-3)}`,
+        processes: [...processes],
+        validFrom: dayOf(since),
+        validTo: dayOf(addDays(today, validDays)),
+        createdAt: since,
+      });
     }
     return { id, name, contact, personId: desk.id, processes };
   };

@@ -76,21 +76,19 @@ export async function payThrough(
 
 async function recordPaid(ctx: Ctx, { invoiceId, owed }: { invoiceId: string; owed: number }): Promise<void> {
   const id = newId();
-  await ctx.tx
-    .insert(payments)
-    .values({
-      id,
-      shopId: shopOf(ctx),
-      invoiceId,
-      attempt: 1,
-      amountMinor: owed,
-      currency: 'USD',
-      state: 'succeeded',
-      intentId: `told_${id}`,
-      paidBy: personOf(ctx.actor) ?? id,
-      startedAt: ctx.now,
-      endedAt: ctx.now,
-    });
+  await ctx.tx.insert(payments).values({
+    id,
+    shopId: shopOf(ctx),
+    invoiceId,
+    attempt: 1,
+    amountMinor: owed,
+    currency: 'USD',
+    state: 'succeeded',
+    intentId: `told_${id}`,
+    paidBy: personOf(ctx.actor) ?? id,
+    startedAt: ctx.now,
+    endedAt: ctx.now,
+  });
   await enterMoney(ctx, {
     invoiceId,
     kind: 'paid',

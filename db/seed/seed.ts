@@ -9,9 +9,11 @@ import { createPart } from '@/lib/parts/create-part';
 import { addLocation } from '@/lib/stock/add-location';
 
 import { campaignThread, type Campaign } from './campaign';
-import { ASSEMBLIES, catalogue, ROUTES } from './catalogue';
+import { catalogue } from './catalogue';
+import { ASSEMBLIES } from './needs';
 import { addDays, dayOf, seedOrganisations, type DemoPerson } from './organisations';
 import { seedPaymentService } from './payment-service';
+import { ROUTES } from './routes';
 import { openStage, playAll, StagePlay, type Thread } from './stage-play';
 import { CAMPAIGNS, OTHER_YARD } from './story';
 

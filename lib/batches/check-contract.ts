@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { declare } from '@/lib/api/endpoint';
 import { Id, Moment } from '@/lib/api/shapes';
 
-import { CHECK_LEVELS, WAYS_OUT } from './checks';
+import { CHECK_LEVELS, WAYS_OUT } from './finding';
 import { BatchRef, Seen } from './contract';
 
 const Finding = z.object({

@@ -10,7 +10,8 @@ import { movePieces } from '@/lib/stock/move-pieces';
 import { statePapers } from '@/lib/travellers/state-papers';
 
 import { changeBuilding, refOf } from './change-building';
-import { canOverride, checkBatch, type Finding } from './checks';
+import { checkBatch } from './checks';
+import { canOverride, type Finding } from './finding';
 import type { dispatchBatch as declaration } from './contract';
 import { freezeLines } from './freeze-lines';
 import { readCheckFacts, readOverrides } from './read-check-facts';

@@ -9,7 +9,8 @@ import { newId } from '@/lib/ids';
 
 import { changeBuilding, refOf } from './change-building';
 import type { overrideCheck as declaration } from './check-contract';
-import { canOverride, checkBatch } from './checks';
+import { checkBatch } from './checks';
+import { canOverride } from './finding';
 import { readCheckFacts } from './read-check-facts';
 import { refreshStanding } from './refresh-standing';
 

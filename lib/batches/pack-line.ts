@@ -82,18 +82,16 @@ export async function packLine(
     createdAt: ctx.now,
   });
   if (step.toProve.length > 0) {
-    await ctx.tx
-      .insert(requirements)
-      .values(
-        step.toProve.map((one, seq) => ({
-          id: newId(),
-          shopId,
-          batchId: batch.id,
-          lineId: id,
-          seq: seq + 1,
-          ...one,
-        })),
-      );
+    await ctx.tx.insert(requirements).values(
+      step.toProve.map((one, seq) => ({
+        id: newId(),
+        shopId,
+        batchId: batch.id,
+        lineId: id,
+        seq: seq + 1,
+        ...one,
+      })),
+    );
   }
   await movePieces(ctx, {
     lotId: line.lotId,

@@ -8,7 +8,7 @@ import type { Ctx } from '@/lib/auth/context';
 import { calendarDay } from '@/lib/day-words';
 import { notFound } from '@/lib/errors';
 
-import type { CheckedLine, CheckFacts } from './checks';
+import type { CheckedLine, CheckFacts } from './check';
 
 /** Reads what the checks look at. */
 export async function readCheckFacts(ctx: Ctx, batchId: string): Promise<CheckFacts> {

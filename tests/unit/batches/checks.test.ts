@@ -1,7 +1,9 @@
 import { expect, test } from 'vitest';
 
 import { approvalStanding, type Approval } from '@/lib/batches/approval';
-import { canOverride, checkBatch, type CheckedLine, type CheckFacts } from '@/lib/batches/checks';
+import { type CheckedLine, type CheckFacts } from '@/lib/batches/check';
+import { checkBatch } from '@/lib/batches/checks';
+import { canOverride } from '@/lib/batches/finding';
 
 const step = {
   process: 'anodize',
