@@ -2,6 +2,7 @@ import { readFileSync } from 'node:fs';
 import path from 'node:path';
 
 import Papa from 'papaparse';
+import { TestRunner } from 'vitest';
 
 import { CERTAINTIES, CONFIDENCES } from '@/lib/trade/source';
 
@@ -33,7 +34,33 @@ export function publishedRows<const Column extends string>(
     return source === '' || !known.includes(confidence) || !known.includes(certainty);
   });
   if (unsaid >= 0) throw new Error(`${file}.csv: row ${unsaid + 1} does not say where it comes from`);
-  return data;
+  return data.map((row, index) => noteWhenRead(row, `${file}:${index + 1}`));
+}
+
+declare module 'vitest' {
+  interface TaskMeta {
+    /** The rows of published values that the test has read, for the count of `npm run trade:check`. */
+    published?: Record<string, { source: string; confidence: string }>;
+  }
+}
+
+/**
+ * A row counts as checked where a running test reads a value of it, so that the count cannot say more than the tests
+ * do. What is read only to name a test does not count.
+ */
+function noteWhenRead<Column extends string>(row: PublishedRow<Column>, place: string): PublishedRow<Column> {
+  const { source, confidence }: PublishedRow<never> = row;
+  const noted: PropertyDescriptorMap = {};
+  for (const [column, value] of Object.entries(row)) {
+    const get = () => {
+      const meta = TestRunner.getCurrentTest()?.meta;
+      if (meta) meta.published = { ...meta.published, [place]: { source, confidence } };
+      return value;
+    };
+    const isValue = !PROVENANCE.some((name) => name === column);
+    noted[column] = isValue ? { enumerable: true, get } : { enumerable: true, value };
+  }
+  return Object.defineProperties({ ...row }, noted);
 }
 
 /** A published value as a number; an empty field is no zero. */
