@@ -2,6 +2,8 @@ import { test as base, expect, type Locator, type Page } from '@playwright/test'
 
 import { DEMO_PASSWORD } from '@/db/seed/sign-ins';
 
+import { looksRight } from './look';
+
 /** What a way through the product cost the person: printed at its end, because fewer is better than prettier. */
 export interface Cost {
   clicks: number;
@@ -10,16 +12,19 @@ export interface Cost {
   waitedS: number;
 }
 
+const NOTHING_SPENT: Cost = { clicks: 0, keys: 0, pages: 0, waitedS: 0 };
+
 /** A person at a browser. Counts presses, typed keys, pages and the seconds of waiting for what was asked. */
 export class Person {
-  readonly cost: Cost = { clicks: 0, keys: 0, pages: 0, waitedS: 0 };
+  private cost = NOTHING_SPENT;
 
   constructor(
     readonly name: string,
     readonly page: Page,
+    readonly width: number,
   ) {
     page.on('framenavigated', (frame) => {
-      if (frame === page.mainFrame()) this.cost.pages += 1;
+      if (frame === page.mainFrame()) this.spends({ pages: 1 });
     });
   }
 
@@ -28,19 +33,30 @@ export class Person {
   }
 
   async press(target: Locator): Promise<void> {
-    this.cost.clicks += 1;
+    this.spends({ clicks: 1 });
     await this.waiting(() => target.click());
   }
 
   /** Types into a field, replacing what is there. */
   async type(target: Locator, text: string): Promise<void> {
-    this.cost.clicks += 1;
-    this.cost.keys += text.length;
+    this.spends({ clicks: 1, keys: text.length });
     await this.waiting(() => target.fill(text));
   }
 
+  /** Opens a list and takes one of its choices. */
+  async choose(target: Locator, choice: string | { index: number }): Promise<void> {
+    this.spends({ clicks: 2 });
+    await this.waiting(() => target.selectOption(choice));
+  }
+
+  /** Gives a file: the button and the file in the system's own window. */
+  async gives(target: Locator, name: string, content: Buffer): Promise<void> {
+    this.spends({ clicks: 2 });
+    await this.waiting(() => target.setInputFiles({ name, mimeType: 'application/pdf', buffer: content }));
+  }
+
   async key(key: string): Promise<void> {
-    this.cost.keys += 1;
+    this.spends({ keys: 1 });
     await this.waiting(() => this.page.keyboard.press(key));
   }
 
@@ -59,12 +75,29 @@ export class Person {
     );
   }
 
-  /** One line for the log: what the way cost. */
+  /** Keeps a picture of the page and has it looked over; no time of the person's. */
+  looks(name: string): Promise<void> {
+    return looksRight(this.page, `${name}-${this.width}`);
+  }
+
+  /** One line for the log: what the way cost since the last one. */
   report(way: string): void {
     const { clicks, keys, pages, waitedS } = this.cost;
     console.log(
-      `${this.name}, ${way}: ${clicks} clicks, ${keys} keys, ${pages} pages, ${waitedS.toFixed(1)} s of waiting`,
+      `${this.name} at ${this.width} px, ${way}: ${clicks} clicks, ${keys} keys, ${pages} pages, ${waitedS.toFixed(1)} s of waiting`,
     );
+    this.cost = NOTHING_SPENT;
+  }
+
+  private spends(more: Partial<Cost>): void {
+    const { clicks = 0, keys = 0, pages = 0, waitedS = 0 } = more;
+    const was = this.cost;
+    this.cost = {
+      clicks: was.clicks + clicks,
+      keys: was.keys + keys,
+      pages: was.pages + pages,
+      waitedS: was.waitedS + waitedS,
+    };
   }
 
   private async waiting<T>(work: () => Promise<T>): Promise<T> {
@@ -72,7 +105,7 @@ export class Person {
     try {
       return await work();
     } finally {
-      this.cost.waitedS += (performance.now() - began) / 1000;
+      this.spends({ waitedS: (performance.now() - began) / 1000 });
     }
   }
 }
@@ -92,10 +125,13 @@ export const test = base.extend<People>({
         hasTouch: width < 900,
       });
       contexts.push(context);
-      return new Person(name, await context.newPage());
+      return new Person(name, await context.newPage(), width);
     });
     for (const context of contexts) await context.close();
   },
 });
+
+/** The id at the end of a page's address. */
+export const idIn = (url: string): string => new URL(url).pathname.split('/').at(-1) ?? '';
 
 export { expect };
