@@ -11,6 +11,7 @@ import {
 import { BatchCancelledMail, batchCancelledSubject } from './batch-cancelled';
 import { BatchLinkMail, batchLinkSubject } from './batch-link';
 import { DispatchMail, dispatchSubject, reissuedSubject } from './dispatch';
+import { InvoiceRefusedMail, invoiceRefusedSubject } from './invoice-refused';
 import type { MailProps, MailTemplate } from './mail-props';
 import { MessageMail, messageSubject } from './message';
 import { RemittanceMail, remittanceSubject } from './remittance';
@@ -29,6 +30,7 @@ export const ALL_TEMPLATES: { [T in MailTemplate]: Template<T> } = {
   message: { subject: messageSubject, component: MessageMail },
   trouble: { subject: messageSubject, component: MessageMail },
   remittance: { subject: remittanceSubject, component: RemittanceMail },
+  'invoice-refused': { subject: invoiceRefusedSubject, component: InvoiceRefusedMail },
   invitation: { subject: invitationSubject, component: InvitationMail },
   reset: { subject: resetSubject, component: ResetMail },
   'sign-in': { subject: signInSubject, component: SignInMail },

@@ -98,6 +98,17 @@ export const MAIL_PROPS = {
     /** What the transfer carries. */
     reference: Words,
   }),
+  'invoice-refused': OfBatch.extend({
+    stage: z.enum(STAGES),
+    invoiceNumber: Words.nullable(),
+    invoiceDatedOn: Day.nullable(),
+    currency: Currency,
+    /** As it stands on the invoice; null where it was never entered. */
+    totalMinor: Minor.nullable(),
+    reason: Words,
+    /** Where a corrected one is sent; null where the links of the batch have ended. */
+    url: z.url().nullable(),
+  }),
   invitation: Stated.extend({
     organisation: Words,
     inviter: Words,

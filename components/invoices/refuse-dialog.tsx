@@ -30,7 +30,7 @@ export function RefuseDialog({ invoice, open, onClose }: RefuseDialogProps) {
       onClose={onClose}
       busy={write.isPending}
       title={`Refuse invoice ${invoiceName(invoice)}`}
-      lead={`${invoice.processor} sees the reason. Nothing is paid for it; a corrected copy may carry the same number.`}
+      lead={`${invoice.processor} is told by mail, with the reason. Nothing is paid for it; a corrected copy may carry the same number.`}
       onSubmit={refuse}
       actions={
         <>

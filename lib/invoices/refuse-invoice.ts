@@ -8,9 +8,10 @@ import type { Ctx } from '@/lib/auth/context';
 import { refreshStanding } from '@/lib/batches/refresh-standing';
 
 import type * as contract from './contract';
+import { queueRefusal } from './queue-refusal';
 import { lockInvoice } from './read-invoice';
 
-/** Refuses an invoice that is not approved. The processor sees the reason; the number is free for a corrected copy. */
+/** Refuses an invoice that is not approved. The processor is told why by mail; the number is free for a corrected copy. */
 export async function refuseInvoice(ctx: Ctx, input: z.output<(typeof contract.refuseInvoice)['input']>) {
   authorize(ctx, 'invoice.approve');
   const { invoice } = await lockInvoice(ctx, input, 'unapproved');
@@ -26,5 +27,6 @@ export async function refuseInvoice(ctx: Ctx, input: z.output<(typeof contract.r
     after: { number: invoice.number, reason: input.reason },
   });
   await refreshStanding(ctx, invoice.batchId);
+  await queueRefusal(ctx, invoice, input.reason);
   return { version };
 }

@@ -1,13 +1,12 @@
 import { and, asc, eq, sql } from 'drizzle-orm';
 
 import { memberships, users } from '@/db/schema/people';
-import { LINK_ENDS_AT } from '@/lib/auth/identify';
 import type { Ctx } from '@/lib/auth/context';
 import { env } from '@/lib/env';
 import { queueMail } from '@/lib/mail/queue-mail';
 import { batchForMail, type BatchForMail } from '@/lib/portal/batch-for-mail';
+import { openBatchUrl } from '@/lib/portal/open-batch-url';
 import { ofBatchProps } from '@/lib/portal/queue-batch-mail';
-import { standingBatchUrl } from '@/lib/portal/standing-batch-url';
 
 import type { MessageKind, MessageSide } from './contract';
 
@@ -34,7 +33,7 @@ export async function queueNotice(ctx: Ctx, batchId: string, notice: Notice): Pr
       ...ofBatchProps(ctx, batch),
       ...notice,
       stage: batch.stage,
-      url: toShop ? `${env.APP_URL}/batches/${batchId}#messages` : await pageUrl(ctx, batch),
+      url: toShop ? `${env.APP_URL}/batches/${batchId}#messages` : await openBatchUrl(ctx, batch),
     },
   });
 }
@@ -55,10 +54,4 @@ async function shopReaders(ctx: Ctx, batch: BatchForMail): Promise<string[]> {
     .orderBy(asc(memberships.id));
   const sender = people.find((person) => person.id === batch.dispatchedBy);
   return sender ? [sender.email] : people.map((person) => person.email);
-}
-
-async function pageUrl(ctx: Ctx, batch: BatchForMail): Promise<string | null> {
-  return LINK_ENDS_AT.includes(batch.stage)
-    ? null
-    : standingBatchUrl(ctx, { batchId: batch.id, processorId: batch.processorId });
 }

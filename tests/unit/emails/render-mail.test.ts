@@ -129,6 +129,17 @@ describe('what a mail is about', () => {
     expect((await rendered('remittance', { withheld: [] })).text).not.toContain('Not paid');
   });
 
+  test('a refused invoice says which, why, and where a corrected one goes while the links stand', async () => {
+    const { subject, text } = await rendered('invoice-refused');
+    expect(subject).toBe('Heron Reach Floatworks refused invoice 26-1187, B-0419');
+    expect(text).toContain('The lot charge stands twice.');
+    expect(text).toContain('Send a corrected invoice');
+    const ended = await rendered('invoice-refused', { url: null, invoiceNumber: null, totalMinor: null });
+    expect(linksOf(ended.html)).toEqual([]);
+    expect(ended.subject).toContain('refused an invoice');
+    expect(ended.text).not.toContain('null');
+  });
+
   test('moments are told in the zone of the reader', async () => {
     expect((await rendered('sign-in')).text.replace(/\s+/g, ' ')).toContain('Wed 17 Jun 07:42');
     expect((await rendered('sign-in', { zone: 'UTC' })).text.replace(/\s+/g, ' ')).toContain(

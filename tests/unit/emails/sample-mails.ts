@@ -82,6 +82,16 @@ export const sampleMails: { [T in MailTemplate]: MailGiven<T> } = {
     paidAt: '2026-06-17T12:00:00Z',
     reference: 'B-0419 26-1187',
   },
+  'invoice-refused': {
+    ...ofBatch,
+    stage: 'proved',
+    invoiceNumber: '26-1187',
+    invoiceDatedOn: '2026-06-10',
+    currency: 'USD',
+    totalMinor: 1_623_40,
+    reason: 'The order says 58 pieces.\nThe lot charge stands twice.',
+    url: dispatch.url,
+  },
   invitation: {
     ...account,
     organisation: 'Heron Reach Floatworks',
