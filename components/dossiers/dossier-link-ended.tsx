@@ -1,3 +1,4 @@
+import { PublicPage } from '@/components/people/public-page';
 import { dayWords } from '@/lib/day-words';
 import type { DossierLinkFace } from '@/lib/dossiers/contract';
 
@@ -48,9 +49,8 @@ function Words({
   shop: string;
 }) {
   return (
-    <>
-      <h1 className="text-[1.4375rem] leading-[1.6875rem]">{says}</h1>
-      <p className="pt-2">
+    <PublicPage title={says}>
+      <p>
         {todo}{' '}
         {phone !== null && (
           <a className="lw-word-button" href={`tel:${phone.replaceAll(/[^+\d]/g, '')}`}>
@@ -58,6 +58,6 @@ function Words({
           </a>
         )}
       </p>
-    </>
+    </PublicPage>
   );
 }

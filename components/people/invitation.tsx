@@ -19,17 +19,7 @@ export function Invitation({ token, signIn }: { token: string; signIn: SignInAct
   const router = useRouter();
   const { data } = useRead(readInvitation, { token });
   const { state, organisation, name, email, roles, hasAccount } = data;
-  if (state !== 'open' || organisation === null || email === null) {
-    return (
-      <PublicPage title="Invitation" lead={ENDED[state] ?? ENDED['unknown']}>
-        <p>
-          <a href="/sign-in" className="lw-word-button">
-            Sign in
-          </a>
-        </p>
-      </PublicPage>
-    );
-  }
+  if (state !== 'open' || organisation === null || email === null) return <InvitationEnded state={state} />;
   return (
     <PublicPage title={`Join ${organisation}`} lead={`You are invited as ${roles.join(', ')}.`}>
       {hasAccount ? (
@@ -46,6 +36,19 @@ export function Invitation({ token, signIn }: { token: string; signIn: SignInAct
       ) : (
         <AcceptForm token={token} email={email} name={name ?? ''} signIn={signIn} />
       )}
+    </PublicPage>
+  );
+}
+
+/** Why an invitation opens nothing. */
+export function InvitationEnded({ state }: { state: string }) {
+  return (
+    <PublicPage title="Invitation" lead={ENDED[state] ?? ENDED['unknown']}>
+      <p>
+        <a href="/sign-in" className="lw-word-button">
+          Sign in
+        </a>
+      </p>
     </PublicPage>
   );
 }

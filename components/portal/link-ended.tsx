@@ -1,4 +1,6 @@
 import type { ReactNode } from 'react';
+
+import { PublicPage } from '@/components/people/public-page';
 import { BatchTag } from '@/components/ui/tag';
 import type { LinkFace } from '@/lib/portal/link-contract';
 
@@ -6,26 +8,23 @@ import type { LinkFace } from '@/lib/portal/link-contract';
 export function LinkEnded({ state, batch }: LinkFace) {
   if (batch === null || state === 'unknown' || state === 'open') {
     return (
-      <>
-        <h1 className="text-[1.4375rem] leading-[1.6875rem]">This is not a link of ours</h1>
-        <p className="pt-2">
+      <PublicPage title="This is not a link of ours">
+        <p>
           Perhaps it was cut when it was copied. Open it from the mail itself, or ask the shop that sent you
           the parts for a new one.
         </p>
         <SignIn />
-      </>
+      </PublicPage>
     );
   }
   const { says, todo } = WORDS[state](batch);
   return (
-    <>
-      <BatchTag size="phone" stage={batch.stage} number={batch.number} />
-      <h1 className="pt-2.5 text-[1.4375rem] leading-[1.6875rem]">{says}</h1>
-      <p className="pt-2">
+    <PublicPage tag={<BatchTag size="phone" stage={batch.stage} number={batch.number} />} title={says}>
+      <p>
         {todo} <Ring {...batch} />
       </p>
       <SignIn />
-    </>
+    </PublicPage>
   );
 }
 
@@ -60,7 +59,7 @@ function Ring({ shop, shopPhone }: Batch) {
 
 function SignIn() {
   return (
-    <p className="pt-4 text-second leading-5 text-quiet">
+    <p className="text-second leading-5 text-quiet">
       People of the processor who have an account see all their batches after they{' '}
       <a href="/sign-in">sign in</a>.
     </p>

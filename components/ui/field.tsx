@@ -21,7 +21,7 @@ interface FieldProps extends FieldWords {
 export function Field({ id, label, hint, error, frozen, className = '', children }: FieldProps) {
   const below = frozen ?? hint;
   return (
-    <div className={`flex min-w-0 flex-col gap-[3px] ${className}`}>
+    <div className={`flex min-w-0 flex-col gap-1.5 ${className}`}>
       <label id={`${id}-label`} htmlFor={id} className="font-cond text-word leading-[1.125rem]">
         {label}
       </label>

@@ -2,7 +2,6 @@ import { headers } from 'next/headers';
 
 import { readOnServer } from '@/app/_kit/prefetch';
 import { LinkEnded } from '@/components/portal/link-ended';
-import { PublicHead } from '@/components/shell/public-head';
 import { readBatchLinkEndpoint } from '@/lib/portal/link-endpoints';
 
 /** Says which kind of "not" it is; the token comes from the address, because this page is given no parameters. */
@@ -10,12 +9,5 @@ export default async function LinkNotFound() {
   const path = (await headers()).get('x-path') ?? '';
   const token = decodeURIComponent(/^\/b\/([^/?]+)/.exec(path)?.[1] ?? 'none');
   const face = await readOnServer(readBatchLinkEndpoint, { token });
-  return (
-    <>
-      <PublicHead />
-      <main className="mx-auto max-w-[46rem] px-4 py-6">
-        <LinkEnded {...face} />
-      </main>
-    </>
-  );
+  return <LinkEnded {...face} />;
 }

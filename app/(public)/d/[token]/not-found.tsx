@@ -2,7 +2,6 @@ import { headers } from 'next/headers';
 
 import { readOnServer } from '@/app/_kit/prefetch';
 import { DossierLinkEnded } from '@/components/dossiers/dossier-link-ended';
-import { PublicHead } from '@/components/shell/public-head';
 import { readDossierLinkEndpoint } from '@/lib/dossiers/endpoints';
 
 /** Says which kind of "not" it is; the token comes from the address, because this page is given no parameters. */
@@ -10,12 +9,5 @@ export default async function DossierLinkNotFound() {
   const path = (await headers()).get('x-path') ?? '';
   const token = decodeURIComponent(/^\/d\/([^/?]+)/.exec(path)?.[1] ?? 'none');
   const face = await readOnServer(readDossierLinkEndpoint, { token });
-  return (
-    <>
-      <PublicHead />
-      <main className="mx-auto max-w-[46rem] px-4 py-6">
-        <DossierLinkEnded {...face} />
-      </main>
-    </>
-  );
+  return <DossierLinkEnded {...face} />;
 }
