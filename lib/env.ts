@@ -32,6 +32,7 @@ const Environment = z
     AUTH_SECRET: z.string().min(32, 'must have at least 32 characters').optional(),
     PORT: port.default(4600),
     WORKER_PORT: port.default(4640),
+    TRUSTED_PROXIES: z.coerce.number().int().min(0).max(10).default(0),
 
     SMTP_URL: z
       .url({ protocol: /^smtps?$/, error: 'must be an smtp:// or smtps:// address' })

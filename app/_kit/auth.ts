@@ -11,6 +11,7 @@ import { openBatchLink } from '@/lib/people/open-batch-link';
 import { signInWithMailedLink } from '@/lib/people/sign-in-with-mailed-link';
 import { signInWithPassword } from '@/lib/people/sign-in-with-password';
 
+import { clientAddress } from './client-address';
 import { claimsOf, secureCookies } from './session';
 
 declare module 'next-auth' {
@@ -20,8 +21,7 @@ declare module 'next-auth' {
 }
 
 const text = (value: unknown): string => (typeof value === 'string' ? value : '');
-const addressOf = (request: Request): string =>
-  request.headers.get('x-forwarded-for')?.split(',')[0]?.trim() ?? 'local';
+const addressOf = (request: Request): string => clientAddress(request.headers) ?? 'local';
 
 /** Too many tries: the seconds to wait travel in the code, because the form's answer and the address carry nothing else. */
 class SignInThrottled extends CredentialsSignin {

@@ -1,5 +1,6 @@
 import type { Endpoint } from '@/lib/api/endpoint';
 
+import { textOf } from './request-body';
 import { serve } from './serve';
 
 /**
@@ -7,12 +8,8 @@ import { serve } from './serve';
  * signature beside it, then everything is as in `serve`. Nobody else is served this way.
  */
 export function serveRaw(endpoint: Endpoint, signatureHeader: string): ReturnType<typeof serve> {
-  const answer = serve(endpoint);
-  return async (request, route) => {
-    const headers = new Headers(request.headers);
-    // The length was that of the raw body.
-    headers.delete('content-length');
-    const body = JSON.stringify({ body: await request.text(), signature: headers.get(signatureHeader) });
-    return answer(new Request(request.url, { method: request.method, headers, body }), route);
-  };
+  return serve(endpoint, async (request) => ({
+    body: await textOf(request),
+    signature: request.headers.get(signatureHeader),
+  }));
 }

@@ -11,11 +11,11 @@ import { AppError } from '@/lib/errors';
 import { newId } from '@/lib/ids';
 import { log } from '@/lib/log';
 
+import { clientAddress } from './client-address';
 import { once } from './idempotency';
 import { problemResponse } from './problem';
+import { jsonBodyOf } from './request-body';
 import { identify } from './session';
-
-const LARGEST_BODY = 1_000_000;
 
 type RouteHandler = (
   request: Request,
@@ -25,13 +25,16 @@ type RouteHandler = (
 /**
  * Turns an endpoint into a route: who, may they, is the input right, in whose rows, done once, told in one form.
  * The only door of the browser and of programs.
+ *
+ * @param readBody what the input of a write is made of, where it is not the JSON that came
  */
-export function serve(endpoint: Endpoint): RouteHandler {
+export function serve(endpoint: Endpoint, readBody = jsonBodyOf): RouteHandler {
   return async (request, route) => {
     const requestId = request.headers.get('x-request-id')?.slice(0, 64) ?? newId();
     const startedAt = performance.now();
     try {
-      const response = await answer(endpoint, request, await route.params, requestId);
+      const asked = { request, params: await route.params, requestId, readBody };
+      const response = await answer(endpoint, asked);
       log.info(
         {
           requestId,
@@ -58,11 +61,16 @@ export function serve(endpoint: Endpoint): RouteHandler {
   };
 }
 
+interface Asked {
+  request: Request;
+  params: Record<string, string>;
+  requestId: string;
+  readBody: typeof jsonBodyOf;
+}
+
 async function answer(
   endpoint: Endpoint,
-  request: Request,
-  params: Record<string, string>,
-  requestId: string,
+  { request, params, requestId, readBody }: Asked,
 ): Promise<Response> {
   const { declaration } = endpoint;
   const now = new Date();
@@ -71,9 +79,9 @@ async function answer(
   const identity = atItsSide(await identify(request.headers, now), endpoint);
   standBefore(identity, endpoint);
 
-  const body = isRead ? queryOf(request) : await bodyOf(request);
+  const body = isRead ? queryOf(request) : await readBody(request);
   const input: Record<string, unknown> = declaration.input.parse({ ...body, ...params });
-  const address = request.headers.get('x-forwarded-for')?.split(',')[0]?.trim() ?? null;
+  const address = clientAddress(request.headers);
   const key = isRead ? null : request.headers.get('idempotency-key');
 
   const owner = keyOwnerOf(identity);
@@ -132,20 +140,6 @@ function queryOf(request: Request): Record<string, unknown> {
     query[name] = values.length > 1 ? values : values[0];
   }
   return query;
-}
-
-async function bodyOf(request: Request): Promise<Record<string, unknown>> {
-  const text = await request.text();
-  if (text.length > LARGEST_BODY) throw new AppError('too_large', 'This is more than one request may carry.');
-  if (text === '') return {};
-  try {
-    const body: unknown = JSON.parse(text);
-    if (body !== null && typeof body === 'object' && !Array.isArray(body))
-      return body as Record<string, unknown>;
-  } catch {
-    // Told below, in the same words as any body of the wrong shape.
-  }
-  throw new AppError('bad_input', 'The body must be one JSON object.');
 }
 
 /** Whose idempotency keys: a person's in one organisation, a link's, or (door) nobody's in common. */

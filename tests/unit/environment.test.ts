@@ -26,6 +26,8 @@ describe('the environment', () => {
     [{ AUTH_SECRET, SMTP_URL: 'http://mail.example.test' }, 'SMTP_URL'],
     [{ AUTH_SECRET, PORT: 'web' }, 'PORT'],
     [{ AUTH_SECRET, PORT: '70000' }, 'PORT'],
+    [{ AUTH_SECRET, TRUSTED_PROXIES: '-1' }, 'TRUSTED_PROXIES'],
+    [{ AUTH_SECRET, TRUSTED_PROXIES: 'all' }, 'TRUSTED_PROXIES'],
     [{ AUTH_SECRET, LOG_LEVEL: 'loud' }, 'LOG_LEVEL'],
     [{ AUTH_SECRET, S3_ENDPOINT: 'https://s3.example.test' }, 'S3_SECRET_ACCESS_KEY'],
     [{ AUTH_SECRET, STRIPE_SECRET_KEY: 'sk_live' }, 'STRIPE_WEBHOOK_SECRET'],
