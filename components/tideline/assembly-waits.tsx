@@ -54,7 +54,7 @@ function AssemblyRow({ assembly, tideline }: { assembly: AssemblyWait; tideline:
       <Cell>
         <Link
           href={`/assemblies/${assembly.id}`}
-          className="text-tag font-cond font-semibold no-underline hover:underline"
+          className="text-tag font-cond font-semibold no-underline hover:underline md:whitespace-nowrap"
         >
           {assembly.name}
         </Link>
@@ -86,11 +86,11 @@ function AssemblyRow({ assembly, tideline }: { assembly: AssemblyWait; tideline:
             <Link
               key={batch.id}
               href={`/batches/${batch.id}`}
-              className={`inline-flex items-center gap-1 no-underline ${STAGE_TONES[batch.stage]}`}
+              className={`inline-flex items-center gap-1 text-(--ti) no-underline ${STAGE_TONES[batch.stage]}`}
               aria-label={`${batch.number}, ${STAGE_WORDS[batch.stage]}, ${batch.pieces} pieces`}
             >
               <StageMark stage={batch.stage} size={12} />
-              <span className="num font-semibold text-(--ti)">{batch.number.replace(/^B-/, '')}</span>
+              <span className="num font-semibold">{batch.number.replace(/^B-/, '')}</span>
             </Link>
           ))}
           {assembly.batches.length > MOST_BATCHES && (

@@ -2,6 +2,8 @@ import { tagTop, type PlacedTag } from '@/lib/tideline/lay-out';
 import type { Scale } from '@/lib/tideline/scale';
 
 const MIDDLE_PX = 12;
+/** A shorter thread is a speck, not a thread. */
+const SHORTEST_THREAD_PX = 12;
 
 /** What is drawn beside the tags: late strips with a tick a day, threads to the assemblies, notches and broken promises. */
 export function LaneStrings({
@@ -55,7 +57,9 @@ function Thread({ fromX, toX, knotX, y }: { fromX: number; toX: number; knotX: n
   const sag = Math.min(6, Math.max(0, (toX - fromX) / 24));
   return (
     <g fill="none" stroke="var(--line)">
-      <path d={`M${fromX + 4} ${y}Q${(fromX + toX) / 2} ${y + 2 * sag} ${toX} ${y}`} />
+      {toX - fromX >= SHORTEST_THREAD_PX && (
+        <path d={`M${fromX + 4} ${y}Q${(fromX + toX) / 2} ${y + 2 * sag} ${toX} ${y}`} />
+      )}
       <circle cx={knotX} cy={y} r="3.5" fill="var(--paper)" stroke="var(--ink)" strokeWidth="1.4" />
     </g>
   );

@@ -17,13 +17,19 @@ export function Summary({ tideline }: { tideline: Tideline }) {
       {(late > 0 || undated > 0) && ': '}
       {late > 0 && <strong className="text-held-ink">{late} late</strong>}
       {late > 0 && undated > 0 && ', '}
-      {undated > 0 && `${undated} without a date`}. <strong>{back.length}</strong> back, not yet in stock
-      {held > 0 && (
+      {undated > 0 && `${undated} without a date`}.
+      {back.length > 0 && (
         <>
-          : <strong className="text-held-ink">{held} held</strong>
+          {' '}
+          <strong>{back.length}</strong> back, not yet in stock
+          {held > 0 && (
+            <>
+              : <strong className="text-held-ink">{held} held</strong>
+            </>
+          )}
+          .
         </>
       )}
-      .
     </p>
   );
 }

@@ -3,7 +3,7 @@ import Link from 'next/link';
 import { BatchTag } from '@/components/ui/tag';
 import { LateFlag } from '@/components/ui/day';
 import { shortDayWords } from '@/lib/day-words';
-import { outsideWords, tagTop, type PlacedTag } from '@/lib/tideline/lay-out';
+import { flagWidth, outsideWords, tagTop, type PlacedTag } from '@/lib/tideline/lay-out';
 import { daysBetween } from '@/lib/tideline/lateness';
 import type { Scale } from '@/lib/tideline/scale';
 
@@ -19,7 +19,9 @@ export function TagLink({ tag, scale, today }: TagLinkProps) {
   const { batch, late, string } = tag;
   const top = tagTop(tag.row);
   const outside = outsideWords(tag);
-  const afterX = late ? Math.max(tag.x + tag.width, scale.todayX) + 60 : tag.x + tag.width + 5;
+  const afterX = late
+    ? Math.max(tag.x + tag.width, scale.todayX) + flagWidth(late.days)
+    : tag.x + tag.width + 5;
   return (
     <li>
       <div className="absolute" style={{ left: tag.x, top, width: tag.width }}>

@@ -11,8 +11,8 @@ export function TidelineList({ tideline }: { tideline: Tideline }) {
   const columns = [
     { says: 'Batch' },
     { says: 'What' },
-    { says: 'Out' },
-    { says: 'Promised' },
+    { says: 'Out', right: true },
+    { says: 'Promised', right: true },
     { says: 'Back', right: true },
     { says: 'Late', right: true },
     { says: 'Holds up' },
@@ -43,10 +43,13 @@ function BatchRow({ batch, tideline }: { batch: TidelineBatch; tideline: Tidelin
         {batch.dispatchedOn && shortDayWords(batch.dispatchedOn, clock)}
       </Cell>
       <Cell figure head="Promised">
-        {batch.promisedOn ? shortDayWords(batch.promisedOn, clock) : batch.dispatchedOn && 'no date yet'}
+        {batch.promisedOn !== null && shortDayWords(batch.promisedOn, clock)}
+        {batch.promisedOn === null && batch.dispatchedOn !== null && (
+          <span className="font-sans text-quiet">no date yet</span>
+        )}
       </Cell>
       <Cell figure right head="Back">
-        {batch.piecesBack} of {batch.pieces}
+        {batch.dispatchedOn !== null && `${batch.piecesBack} of ${batch.pieces}`}
       </Cell>
       <Cell figure right head="Late">
         {late > 0 && <span className="font-semibold text-held-ink">{late} d</span>}

@@ -33,33 +33,10 @@ export function TidelinePlot({ tideline }: { tideline: Tideline }) {
   );
   const lanes = useMemo(() => layOut(tideline, scale), [tideline, scale]);
   const height = lanes.reduce((sum, lane) => sum + lane.height, 0);
-  const zoom = (by: number) =>
-    setDayPx(DAY_WIDTHS[Math.min(Math.max(DAY_WIDTHS.indexOf(dayPx) + by, 0), DAY_WIDTHS.length - 1)] ?? 18);
 
   return (
     <div ref={box} className="relative overflow-hidden" onKeyDown={walkTags}>
-      <div className="absolute top-0 left-0 z-10 flex gap-1 print:hidden">
-        <Button
-          size="small"
-          shortcut="-"
-          onClick={() => zoom(-1)}
-          aria-label="Show more days"
-          notNow={dayPx === DAY_WIDTHS[0] ? 'All days are shown' : undefined}
-          reasonAt="elsewhere"
-        >
-          −
-        </Button>
-        <Button
-          size="small"
-          shortcut="+"
-          onClick={() => zoom(1)}
-          aria-label="Show fewer days"
-          notNow={dayPx === DAY_WIDTHS.at(-1) ? 'As near as it goes' : undefined}
-          reasonAt="elsewhere"
-        >
-          +
-        </Button>
-      </div>
+      <Zoom dayPx={dayPx} onChange={setDayPx} />
       <div className="relative" style={{ marginLeft: LABEL_PX, height: 48 }}>
         <DayTicks scale={scale} />
         <p
@@ -83,6 +60,40 @@ export function TidelinePlot({ tideline }: { tideline: Tideline }) {
           ))}
         </ol>
       </div>
+    </div>
+  );
+}
+
+const ZOOMS = [
+  { key: '-', sign: '−', says: 'Show more days', by: -1, end: 'All days are shown' },
+  { key: '+', sign: '+', says: 'Show fewer days', by: 1, end: 'As near as it goes' },
+] as const;
+
+/** Two small presses that are also keys; each shows its one sign. */
+function Zoom({ dayPx, onChange }: { dayPx: DayWidth; onChange: (dayPx: DayWidth) => void }) {
+  const at = DAY_WIDTHS.indexOf(dayPx);
+  return (
+    <div className="absolute top-0 left-0 z-10 flex items-center gap-1 font-cond text-caption text-quiet print:hidden">
+      <span className="pr-1">Days</span>
+      {ZOOMS.map(({ key, sign, says, by, end }) => {
+        const next = DAY_WIDTHS[at + by];
+        return (
+          <Button
+            key={key}
+            size="small"
+            data-key={key}
+            aria-keyshortcuts={key}
+            aria-label={says}
+            onClick={() => next !== undefined && onChange(next)}
+            notNow={next === undefined ? end : undefined}
+            reasonAt="elsewhere"
+          >
+            <span aria-hidden="true" className="num">
+              {sign}
+            </span>
+          </Button>
+        );
+      })}
     </div>
   );
 }

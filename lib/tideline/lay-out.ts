@@ -7,7 +7,6 @@ export const ROW_PX = 30;
 const TAG_PX = 24;
 const SMALLEST_LANE_PX = 46;
 const LANE_PADDING_PX = 8;
-const FLAG_PX = 62;
 /** An undated batch is drawn this long, fading, so that it has a body at all. */
 const UNDATED_DAYS = 12;
 const MOST_ROWS = { lane: 8, all: 24 };
@@ -169,8 +168,11 @@ function endOfBody(
   const body = tag.x + tag.width;
   const outside = outsideWords(tag);
   const words = outside === '' ? 0 : widthOfText(outside, 6.6) + 14;
-  return (tag.late ? Math.max(body, scale.todayX) + FLAG_PX : body) + words;
+  return (tag.late ? Math.max(body, scale.todayX) + flagWidth(tag.late.days) : body) + words;
 }
+
+/** The flag of a late batch grows with its number of days. */
+export const flagWidth = (days: number): number => 54 + widthOfText(String(days), 7.3);
 
 /** What could not stand in the tag, and what stands after it. */
 export function outsideWords(tag: Pick<PlacedTag, 'batch' | 'show' | 'after'>): string {
