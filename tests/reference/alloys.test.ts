@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 
-import { ALLOYS, type Alloy } from '@/lib/trade/alloys/alloy';
+import { ALLOYS } from '@/lib/trade/alloys/alloy';
 import { densityOf } from '@/lib/trade/alloys/density';
 import { presentName } from '@/lib/trade/alloys/present-name';
 import { readMaterial } from '@/lib/trade/alloys/read-material';
@@ -9,14 +9,8 @@ import { DENSITIES } from '@/lib/trade/tables/densities';
 import { OLD_NAMES } from '@/lib/trade/tables/old-names';
 import { TEMPER_DESIGNATIONS } from '@/lib/trade/tables/tempers';
 
-import { numberOf, publishedRows, saidBy } from './values';
-
-const isAlloy = (name: string): name is Alloy => name in ALLOYS;
-
-function alloyOf(name: string): Alloy {
-  if (!isAlloy(name)) throw new Error(`${name} is not in the list of alloys`);
-  return name;
-}
+import { alloyOf } from './trade-words';
+import { numberOf, publishedRows, casesOf } from './values';
 
 describe('densities', () => {
   const published = publishedRows('densities', ['alloy', 'condition', 'lb_per_in3', 'g_per_cm3']);
@@ -27,9 +21,9 @@ describe('densities', () => {
     expect(density.ok && density.gPerCm3).toBeCloseTo(2.768, 3);
   });
 
-  test.each(published.map((row) => ({ ...row, said: saidBy(row) })))(
-    'density of $alloy $condition: $g_per_cm3 g/cm³ ($said)',
-    ({ alloy, condition, g_per_cm3, confidence, certainty }) => {
+  test.each(casesOf(published, (row) => `${row.alloy} ${row.condition} is ${row.g_per_cm3} g/cm³`))(
+    '%s',
+    (_name, { alloy, condition, g_per_cm3, confidence, certainty }) => {
       const density = densityOf(DENSITIES, { alloy: alloyOf(alloy), ...(condition && { condition }) });
       if (!density.ok) throw new Error(density.reason);
       // Printed to three places, the last one rounded; two zeros at the end are not printed.
@@ -63,18 +57,17 @@ describe('former names', () => {
     expect(presentName(OLD_NAMES, '24S-T')).toMatchObject({ ok: true, present: ['2024-T3', '2024-T42'] });
   });
 
-  test.each(published.map((row) => ({ ...row, said: saidBy(row) })))(
-    '$written is $present $chief_element $prefix ($said)',
-    ({ written, present, chief_element, prefix, clad, confidence }) => {
-      const name = presentName(OLD_NAMES, written);
-      if (!name.ok) throw new Error(name.reason);
-      if (present) expect(name.present.join('|')).toBe(present);
-      if (chief_element) expect(name.chiefElement).toBe(chief_element);
-      if (prefix) expect(name.prefix).toBe(prefix);
-      expect(name.clad).toBe(clad === 'yes');
-      if (present && !chief_element) expect(name.source.confidence).toBe(confidence);
-    },
-  );
+  test.each(
+    casesOf(published, (row) => `${row.written} is ${row.present || row.chief_element || row.prefix}`),
+  )('%s', (_name, { written, present, chief_element, prefix, clad, confidence }) => {
+    const name = presentName(OLD_NAMES, written);
+    if (!name.ok) throw new Error(name.reason);
+    if (present) expect(name.present.join('|')).toBe(present);
+    if (chief_element) expect(name.chiefElement).toBe(chief_element);
+    if (prefix) expect(name.prefix).toBe(prefix);
+    expect(name.clad).toBe(clad === 'yes');
+    if (present && !chief_element) expect(name.source.confidence).toBe(confidence);
+  });
 
   test('the trap of taking a present name for a licence to use it: the caution stands on every answer', () => {
     for (const { written } of published)

@@ -74,3 +74,9 @@ export function numberOf(text: string): number {
 export function saidBy({ source, confidence }: { source: string; confidence: string }): string {
   return confidence === 'memory' ? `${source}, from memory` : source;
 }
+
+/** Cases for `test.each(…)('%s', …)`: each named by what it says and where that comes from. */
+export const casesOf = <Row extends { source: string; confidence: string }>(
+  rows: readonly Row[],
+  says: (row: Row) => string,
+): [name: string, row: Row][] => rows.map((row) => [`${says(row)} (${saidBy(row)})`, row]);

@@ -22,6 +22,8 @@ export interface TemperRow {
   readonly coldWork?: ColdWork;
   /** What it is called when a user made it. */
   readonly madeByUserIs?: Temper;
+  /** The state that results when the cold work is left out. */
+  readonly withoutColdWork?: Temper;
   /** Means little without the time since the quench. */
   readonly statesTime?: true;
 }
@@ -89,10 +91,11 @@ export const TEMPER_DESIGNATIONS: Table<TemperRow> = {
     { temper: 'O1', madeBy: 'either', source: ALULAND },
     { temper: 'W', madeBy: 'user', statesTime: true, source: STATED_TIME },
     { temper: 'AQ', madeBy: 'user', source: memory('AMS 2770 usage', 'high') },
-    { temper: 'T3', madeBy: 'mill', coldWork: { kind: 'mill' }, source: MANUAL },
+    { temper: 'T3', madeBy: 'mill', withoutColdWork: 'T42', coldWork: { kind: 'mill' }, source: MANUAL },
     {
       temper: 'T351',
       madeBy: 'mill',
+      withoutColdWork: 'T42',
       coldWork: {
         kind: 'stretch',
         percentByForm: { sheet: [0.5, 3], plate: [1.5, 3], bar: [1, 3], forging: [1, 5] },
@@ -103,14 +106,33 @@ export const TEMPER_DESIGNATIONS: Table<TemperRow> = {
       temper: 'T361',
       alsoWritten: ['T36'],
       madeBy: 'mill',
+      withoutColdWork: 'T42',
       coldWork: { kind: 'reduction', percent: [6, 6] },
       source: memory(`${H35_1}; ${TO_1_1A_9}`, 'high'),
     },
-    { temper: 'T37', madeBy: 'mill', coldWork: { kind: 'reduction', percent: [7, 8] }, source: MEDIUM },
-    { temper: 'T31', madeBy: 'mill', coldWork: { kind: 'reduction', percent: [1, 1] }, source: MEDIUM },
+    {
+      temper: 'T37',
+      madeBy: 'mill',
+      withoutColdWork: 'T42',
+      coldWork: { kind: 'reduction', percent: [7, 8] },
+      source: MEDIUM,
+    },
+    {
+      temper: 'T31',
+      madeBy: 'mill',
+      withoutColdWork: 'T42',
+      coldWork: { kind: 'reduction', percent: [1, 1] },
+      source: MEDIUM,
+    },
     { temper: 'T4', madeBy: 'mill_by_name', madeByUserIs: 'T42', source: MANUAL },
     { temper: 'T42', madeBy: 'user', source: H2ABC },
-    { temper: 'T451', madeBy: 'mill', coldWork: { kind: 'stretch' }, source: ALUMECO },
+    {
+      temper: 'T451',
+      madeBy: 'mill',
+      withoutColdWork: 'T42',
+      coldWork: { kind: 'stretch' },
+      source: ALUMECO,
+    },
     { temper: 'T6', madeBy: 'mill_by_name', madeByUserIs: 'T62', source: MANUAL },
     {
       temper: 'T61',
@@ -121,6 +143,7 @@ export const TEMPER_DESIGNATIONS: Table<TemperRow> = {
     {
       temper: 'T651',
       madeBy: 'mill',
+      withoutColdWork: 'T62',
       coldWork: { kind: 'stretch', percentByForm: { plate: [1.5, 3] } },
       source: ALUMECO,
     },
@@ -129,30 +152,63 @@ export const TEMPER_DESIGNATIONS: Table<TemperRow> = {
     { temper: 'T73', madeBy: 'either', source: ALUMECO },
     { temper: 'T74', alsoWritten: ['T736'], madeBy: 'either', source: FORMERLY_T736 },
     { temper: 'T76', madeBy: 'either', source: HIGH },
-    { temper: 'T8', madeBy: 'mill_then_age', coldWork: { kind: 'mill' }, source: FLIGHT_MECHANIC },
+    {
+      temper: 'T8',
+      madeBy: 'mill_then_age',
+      withoutColdWork: 'T62',
+      coldWork: { kind: 'mill' },
+      source: FLIGHT_MECHANIC,
+    },
     {
       temper: 'T81',
       madeBy: 'mill_then_age',
+      withoutColdWork: 'T62',
       coldWork: { kind: 'reduction', percent: [1, 1] },
       source: TO,
     },
-    { temper: 'T851', madeBy: 'mill_then_age', coldWork: { kind: 'stretch' }, source: HIGH },
+    {
+      temper: 'T851',
+      madeBy: 'mill_then_age',
+      withoutColdWork: 'T62',
+      coldWork: { kind: 'stretch' },
+      source: HIGH,
+    },
     {
       temper: 'T861',
       alsoWritten: ['T86'],
       madeBy: 'mill_then_age',
+      withoutColdWork: 'T62',
       coldWork: { kind: 'reduction', percent: [6, 6] },
       source: TO_T86,
     },
     {
       temper: 'T87',
       madeBy: 'mill_then_age',
+      withoutColdWork: 'T62',
       coldWork: { kind: 'reduction', percent: [7, 8] },
       source: HIGH,
     },
-    { temper: 'W51', madeBy: 'mill', coldWork: { kind: 'stretch' }, source: HIGH },
-    { temper: 'T7351', madeBy: 'mill_then_age', coldWork: { kind: 'stretch' }, source: HIGH },
-    { temper: 'T7451', madeBy: 'mill_then_age', coldWork: { kind: 'stretch' }, source: HIGH },
-    { temper: 'T7651', madeBy: 'mill_then_age', coldWork: { kind: 'stretch' }, source: HIGH },
+    { temper: 'W51', madeBy: 'mill', withoutColdWork: 'AQ', coldWork: { kind: 'stretch' }, source: HIGH },
+    {
+      temper: 'T7351',
+      madeBy: 'mill_then_age',
+      withoutColdWork: 'T73',
+      coldWork: { kind: 'stretch' },
+      source: HIGH,
+    },
+    {
+      temper: 'T7451',
+      madeBy: 'mill_then_age',
+      withoutColdWork: 'T74',
+      coldWork: { kind: 'stretch' },
+      source: HIGH,
+    },
+    {
+      temper: 'T7651',
+      madeBy: 'mill_then_age',
+      withoutColdWork: 'T76',
+      coldWork: { kind: 'stretch' },
+      source: HIGH,
+    },
   ],
 };

@@ -21,7 +21,7 @@ export function readTemper(
   table: Table<TemperRow>,
   written: string,
 ): Verdict<{ readonly stated: StatedTemper }, 'unknown_temper'> {
-  const [, name, time] = /^[\s-]*([A-Za-z]+ ?\d*|0)\s*(\(?\s*[\d./]+\s*[a-z]+\s*\)?)?$/i.exec(written) ?? [];
+  const [, name, time] = /^[\s-]*([A-Z]+\d*|T \d+|0)\s*(\(?\s*[\d./]+\s*[a-z]+\s*\)?)?$/i.exec(written) ?? [];
   const designation = name?.replace(' ', '').toUpperCase();
   const row = table.rows.find(
     ({ temper, alsoWritten }) =>
