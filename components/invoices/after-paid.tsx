@@ -14,6 +14,8 @@ export function AfterPaid({ invoice }: { invoice: InvoiceDetail }) {
   const mayPass = (gate?.lines ?? []).reduce((sum, line) => sum + line.mayPass, 0);
   const isPaid = invoice.state === 'paid';
   const pieces = isPaid && gate ? mayPass : accepted;
+  // Everything that was paid for has gone on already.
+  if (pieces === 0) return null;
   return (
     <Section title={isPaid ? 'Now' : 'After it is paid'}>
       <p className="py-1.5 text-second">

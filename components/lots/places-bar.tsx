@@ -11,7 +11,7 @@ interface PlacesBarProps {
 export function PlacesBar({ made, places }: PlacesBarProps) {
   const way = alongTheWay(places);
   return (
-    <span className="flex min-w-0 flex-wrap items-center gap-x-3 gap-y-0.5">
+    <span className="flex min-w-0 flex-wrap items-center gap-x-3 gap-y-0.5 max-lg:flex-col max-lg:items-start">
       <span aria-hidden="true" className="lw-places h-2.5 w-24 flex-none">
         {way.map(({ place, pieces }) => (
           <span

@@ -85,7 +85,7 @@ export function IdentityFields({ frozen }: { frozen: Frozen }) {
           {...register('endCondition')}
         />
       </div>
-      <div className="flex flex-wrap gap-x-9">
+      <div className="flex flex-wrap items-center gap-x-9">
         <Checkbox says="Clad" note="both faces or one" {...register('clad')} />
         {frozen.serialised === undefined ? (
           <Checkbox

@@ -108,7 +108,7 @@ function PartLine({ row }: { row: PartRow }) {
       <Cell figure head="Thickness" className="whitespace-nowrap">
         {row.thickness}
       </Cell>
-      <Cell head="Condition" className="whitespace-nowrap">
+      <Cell head="Condition">
         <Conditions made={row.madeCondition} end={row.endCondition} />
       </Cell>
       <Cell head="Steps">

@@ -35,7 +35,7 @@ export function ProofEditor({ step }: { step: number }) {
         return (
           <div
             key={field.key}
-            className="grid grid-cols-[2fr_2fr_1fr_1.3fr_2fr_auto] items-start gap-x-3 gap-y-2 border-b border-rule py-2 max-md:grid-cols-2"
+            className="grid grid-cols-[2fr_2fr_1fr_1.3fr_2fr_auto] items-start gap-x-3 gap-y-2 border-b border-rule py-2 max-lg:grid-cols-[3fr_3fr_2fr] max-md:grid-cols-2"
           >
             <TextField
               label="Characteristic"

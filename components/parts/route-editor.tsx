@@ -68,7 +68,7 @@ function StepFields({ at, isLast, isUsed, onUp, onDown, onRemove }: StepFieldsPr
           <span aria-hidden="true" className="font-cond text-sub">
             Step <span className="num">{step}</span>
           </span>
-          <span className="ml-auto flex flex-wrap gap-x-4">
+          <span className="ml-auto flex flex-wrap items-center gap-x-4">
             {at > 0 && (
               <Button look="word" aria-label={`Move step ${step} up`} onClick={onUp}>
                 Up

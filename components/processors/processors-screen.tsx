@@ -52,7 +52,7 @@ export function ProcessorsScreen() {
             { says: 'Processor', sorted: 'up' },
             { says: 'Contact' },
             { says: 'Approved today for' },
-            { says: 'First end' },
+            { says: 'Approved to' },
             { says: 'Batches', right: true },
             { says: 'Pieces out', right: true },
           ]}
@@ -87,7 +87,8 @@ function ProcessorLine({ row, clock }: { row: ProcessorRow; clock: Clock }) {
         {!row.active && <span className="font-normal text-quiet"> no longer used</span>}
       </Cell>
       <Cell head="Contact">
-        {row.contactName} <span className="text-quiet">{row.contactEmail}</span>
+        {row.contactName}
+        <span className="block [overflow-wrap:anywhere] text-quiet">{row.contactEmail}</span>
       </Cell>
       <Cell head="Approved today for">
         {row.processes.length === 0 ? (
@@ -96,7 +97,7 @@ function ProcessorLine({ row, clock }: { row: ProcessorRow; clock: Clock }) {
           row.processes.map((process) => PROCESS_WORDS[process]).join(', ')
         )}
       </Cell>
-      <Cell head="First end" className="whitespace-nowrap">
+      <Cell head="Approved to" className="whitespace-nowrap">
         {row.approvalEndsOn !== null && <ApprovalEnd day={row.approvalEndsOn} clock={clock} />}
       </Cell>
       <Cell figure head="Batches">

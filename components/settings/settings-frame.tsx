@@ -8,13 +8,13 @@ import { PERMISSIONS, type Permission } from '@/lib/auth/permissions';
 
 const PAGES: readonly { says: string; href: string; permission: Permission }[] = [
   { says: 'My account', href: '/settings/account', permission: 'self.manage' },
-  { says: 'Tokens for programs', href: '/settings/tokens', permission: 'token.manage' },
+  { says: 'Tokens', href: '/settings/tokens', permission: 'token.manage' },
   { says: 'Shop and policies', href: '/settings/shop', permission: 'shop.settings' },
   { says: 'How the shop pays', href: '/settings/payments', permission: 'shop.settings' },
   { says: 'People', href: '/settings/people', permission: 'people.manage' },
   { says: 'Audit trail', href: '/audit', permission: 'audit.read' },
   { says: 'Work that failed', href: '/jobs', permission: 'jobs.manage' },
-  { says: 'For programs', href: '/api-docs', permission: 'shop.read' },
+  { says: 'The API', href: '/api-docs', permission: 'shop.read' },
 ];
 
 /** Everything that is set or looked up rather than worked on, one list of words beside it. */
@@ -28,7 +28,7 @@ export function SettingsFrame({ children }: { children: ReactNode }) {
     <div className="grid grid-cols-1 gap-x-9 lg:grid-cols-[11.5rem_minmax(0,1fr)]">
       <nav
         aria-label="Settings"
-        className="flex flex-wrap gap-x-5 border-rule pt-4 max-lg:border-b max-lg:pb-1 lg:flex-col lg:pt-5"
+        className="flex flex-wrap gap-x-6 border-rule pt-4 max-lg:border-b max-lg:pb-1 lg:flex-col lg:pt-5"
       >
         {pages.map(({ says, href }) => (
           <Link

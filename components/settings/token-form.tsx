@@ -5,8 +5,8 @@ import { showOnForm } from '@/components/api/show-on-form';
 import { useWrite } from '@/components/api/use-api';
 import { FormRefusal } from '@/components/people/public-page';
 import { Button } from '@/components/ui/button';
-import { CheckboxGroup } from '@/components/ui/choice';
-import { DateField, TextField } from '@/components/ui/field';
+import { Checkbox } from '@/components/ui/choice';
+import { DateField, FieldError, TextField } from '@/components/ui/field';
 import type { Permission } from '@/lib/auth/permissions';
 import { createToken, listTokens } from '@/lib/people/token-contract';
 
@@ -50,16 +50,30 @@ export function TokenForm({ scopes, onMade }: TokenFormProps) {
         />
       </div>
       <div>
-        <CheckboxGroup
-          label="It may"
-          className="gap-x-6 md:columns-2 xl:columns-4"
-          options={scopes.map((scope) => ({
-            value: scope,
-            says: scope.replace('.', ': ').replaceAll('_', ' '),
-          }))}
-          error={errors.scopes?.message}
-          {...form.register('scopes')}
-        />
+        <fieldset aria-describedby={errors.scopes ? 'scopes-error' : undefined}>
+          <legend className="font-cond text-word leading-[1.125rem]">It may</legend>
+          {[...byThing(scopes)].map(([thing, verbs]) => (
+            <div key={thing} className="flex flex-wrap items-center gap-x-6 border-b border-rule py-1">
+              <span aria-hidden="true" className="w-32 flex-none font-cond text-word">
+                {thing}
+              </span>
+              {verbs.map((verb) => (
+                <Checkbox
+                  key={verb}
+                  value={`${thing}.${verb}`}
+                  says={
+                    <>
+                      <span className="sr-only">{thing} </span>
+                      {verb.replaceAll('_', ' ')}
+                    </>
+                  }
+                  {...form.register('scopes')}
+                />
+              ))}
+            </div>
+          ))}
+          {errors.scopes?.message && <FieldError id="scopes-error" says={errors.scopes.message} />}
+        </fieldset>
       </div>
       <FormRefusal says={errors.root?.message} />
       <div>
@@ -69,4 +83,14 @@ export function TokenForm({ scopes, onMade }: TokenFormProps) {
       </div>
     </form>
   );
+}
+
+/** `batch.read`, `batch.build` → batch: read, build. */
+function byThing(scopes: readonly string[]): Map<string, string[]> {
+  const things = new Map<string, string[]>();
+  for (const scope of scopes) {
+    const [thing = '', verb = ''] = scope.split('.');
+    things.set(thing, [...(things.get(thing) ?? []), verb]);
+  }
+  return things;
 }

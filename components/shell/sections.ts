@@ -24,7 +24,14 @@ const SHOP_SECTIONS = [
   { key: 'stock', says: 'Stock', href: '/stock', letter: 'S' },
   { key: 'assemblies', says: 'Assemblies', href: '/assemblies', letter: 'A' },
   { key: 'processors', says: 'Processors', href: '/processors', letter: 'P' },
+  { key: 'reference', says: 'Bench reference', href: '/reference', letter: 'R' },
 ] as const;
+
+const SETTINGS: SectionLink = {
+  says: 'Settings',
+  href: '/settings',
+  also: ['/audit', '/jobs', '/api-docs'],
+};
 
 export type ShopSection = (typeof SHOP_SECTIONS)[number]['key'];
 
@@ -34,7 +41,7 @@ export function shopSections(
   counts: Partial<Record<ShopSection, number>> = {},
 ): SectionLink[] {
   const sections = SHOP_SECTIONS.map((section): SectionLink => ({ ...section, count: counts[section.key] }));
-  return roles.includes('admin') ? [...sections, { says: 'Settings', href: '/settings' }] : sections;
+  return roles.includes('admin') ? [...sections, SETTINGS] : sections;
 }
 
 /** The section a page belongs to: the longest address it begins with. */

@@ -12,7 +12,7 @@ export function TitleCells({ cells }: { cells: readonly TitleCell[] }) {
       {cells.map(({ caption, value }) => (
         <div key={caption} className="min-w-0 border-l border-rule pr-4.5 pl-3.5">
           <dt className="font-cond text-caption text-faint">{caption}</dt>
-          <dd className="text-body font-medium">{value}</dd>
+          <dd className="text-body font-medium has-[.lw-tag]:pt-1">{value}</dd>
         </div>
       ))}
     </dl>

@@ -23,6 +23,8 @@ const GAP_PX = 9;
 export const widthOfText = (text: string, perCharacter: number): number => text.length * perCharacter;
 
 /**
+ * Null where nobody waits, and where there is no room to say who does: the tag's own sentence and the list have it.
+ *
  * @param endX where the tag with its flag and words ends.
  */
 export function stringOf(batch: TidelineBatch, endX: number, scale: Scale): TagString | null {
@@ -33,26 +35,22 @@ export function stringOf(batch: TidelineBatch, endX: number, scale: Scale): TagS
   const needX = xOf(scale, assembly.neededOn) + scale.dayPx / 2;
   const labelWidth = widthOfText(name, 7.2) + widthOfText(day, 6.4) + GAP_PX;
   const common = { fromX: endX, name, day };
-  if (needX < endX + GAP_PX)
-    return {
-      ...common,
-      knotX: null,
-      labelX: endX + GAP_PX,
-      labelSide: 'right',
-      tooLate: true,
-      endX: endX + labelWidth + widthOfText('needed ', 6.4) + GAP_PX,
-    };
+  const tooLate = needX < endX + GAP_PX;
+  const labelX = endX + GAP_PX;
+  const labelEndX = labelX + labelWidth + (tooLate ? widthOfText('needed ', 6.4) : GAP_PX + 2 * KNOT_PX);
+  if (labelEndX > scale.widthPx) return null;
+  if (tooLate) return { ...common, knotX: null, labelX, labelSide: 'right', tooLate, endX: labelEndX };
 
   const knotX = Math.min(needX, scale.widthPx - KNOT_PX);
   const right = knotX + GAP_PX;
   if (right + labelWidth <= scale.widthPx)
-    return { ...common, knotX, labelX: right, labelSide: 'right', tooLate: false, endX: right + labelWidth };
+    return { ...common, knotX, labelX: right, labelSide: 'right', tooLate, endX: right + labelWidth };
   return {
     ...common,
     knotX,
-    labelX: Math.max(endX + GAP_PX, knotX - GAP_PX - labelWidth),
+    labelX: Math.max(labelX, knotX - GAP_PX - labelWidth),
     labelSide: 'left',
-    tooLate: false,
+    tooLate,
     endX: knotX + KNOT_PX,
   };
 }

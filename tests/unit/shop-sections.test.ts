@@ -13,6 +13,7 @@ describe('the section a page belongs to', () => {
     ['/batches/0199/prove', ['Batches']],
     ['/parts/0199', ['Parts and lots']],
     ['/nonconformances/0199', ['Certificates']],
+    ['/audit', ['Settings']],
     ['/batchesque', []],
   ])('%s is in %o', (path, expected) => expect(sectionOf(path)).toEqual(expected));
 });
