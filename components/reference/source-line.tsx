@@ -1,0 +1,20 @@
+import type { Source } from '@/lib/trade/source';
+import type { TableReference } from '@/lib/trade/table';
+
+const HOW: Record<Source['confidence'], string> = {
+  read: 'read in the source',
+  'read+memory': 'partly read, partly from memory',
+  computed: 'worked out from the published rule',
+  memory: 'from memory, to be checked against your copy',
+};
+
+/** Where a value comes from, how it was obtained and how far we trust it. Ends whatever shows a reference value. */
+export function SourceLine({ source, readFrom }: { source: Source; readFrom?: TableReference | undefined }) {
+  return (
+    <p className="pt-2 text-source text-quiet">
+      {source.document}; {HOW[source.confidence]}; {source.certainty} trust.
+      {readFrom && ` Edition: ${readFrom.edition}.`}
+      {source.address !== undefined && ` Seen at ${source.address}.`}
+    </p>
+  );
+}
