@@ -12,6 +12,7 @@ import { useRef } from 'react';
 import { ApiError, call } from '@/lib/api/client';
 import type { Declaration, InputOf, OutputOf } from '@/lib/api/endpoint';
 import { queryKeyOf } from '@/lib/api/query-key';
+import { getWaiting } from '@/lib/tideline/contract';
 
 const optionsOf = <D extends Declaration>(declaration: D, input: InputOf<D>) => ({
   queryKey: queryKeyOf(declaration, input as Record<string, unknown>),
@@ -78,7 +79,12 @@ export function useWrite<D extends Declaration>(
     retry: (count, error) =>
       count < 3 && error instanceof ApiError && [0, 503].includes(error.problem.status),
     retryDelay: (count) => 400 * 2 ** count,
-    onSuccess: () =>
-      Promise.all((options.refreshes ?? []).map((read) => cache.invalidateQueries({ queryKey: [read.id] }))),
+    onSuccess: () => {
+      // Nearly every write changes what waits for somebody; the figures in the head follow without being waited for.
+      void cache.invalidateQueries({ queryKey: [getWaiting.id] });
+      return Promise.all(
+        (options.refreshes ?? []).map((read) => cache.invalidateQueries({ queryKey: [read.id] })),
+      );
+    },
   });
 }

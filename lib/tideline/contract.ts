@@ -90,3 +90,21 @@ export const getTideline = declare({
   input: z.object({}),
   response: Tideline,
 });
+
+const Count = z.int().nonnegative();
+export const WaitingCounts = z.object({
+  total: Count,
+  sections: z.object({ batches: Count, certificates: Count, invoices: Count }),
+});
+export type WaitingCounts = z.output<typeof WaitingCounts>;
+
+export const getWaiting = declare({
+  id: 'getWaiting',
+  method: 'get',
+  path: '/tideline/waiting',
+  summary: 'How much waits for me, in all and by section',
+  side: 'shop',
+  permission: 'batch.read',
+  input: z.object({}),
+  response: WaitingCounts,
+});

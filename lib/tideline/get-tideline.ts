@@ -13,6 +13,16 @@ const STAYS_DAYS = 3;
 
 export async function getTideline(ctx: Ctx) {
   authorize(ctx, 'batch.read');
+  return {
+    ...(await readTideline(ctx)),
+    now: ctx.now,
+    assemblies: await readReadiness(ctx),
+    started: await readStarted(ctx),
+  };
+}
+
+/** The batches not yet in stock and whom they are with. */
+export async function readTideline(ctx: Ctx) {
   const [shop] = await ctx.tx
     .select({ zone: shops.zone, latenessBasis: shops.latenessBasis })
     .from(shops)
@@ -22,12 +32,9 @@ export async function getTideline(ctx: Ctx) {
   const lanes = await readLanes(ctx, [...new Set(batches.map((batch) => batch.processorId))]);
   return {
     today: new Intl.DateTimeFormat('sv-SE', { timeZone: shop.zone }).format(ctx.now),
-    now: ctx.now,
     ...shop,
     lanes,
     batches,
-    assemblies: await readReadiness(ctx),
-    started: await readStarted(ctx),
   };
 }
 

@@ -1,7 +1,7 @@
 import type { Role } from '@/lib/auth/roles';
 import { dayWords } from '@/lib/day-words';
 
-import type { Tideline, TidelineBatch } from './contract';
+import type { Tideline, TidelineBatch, WaitingCounts } from './contract';
 import { daysBetween, daysLate } from './lateness';
 
 /** One thing a person can do now about a batch. */
@@ -18,8 +18,10 @@ export interface Waiting {
 
 const RANK = { held: 1, late: 2, unanswered: 3, toDo: 4 } as const;
 
+type Batches = Pick<Tideline, 'today' | 'latenessBasis' | 'lanes' | 'batches'>;
+
 /** What waits for a person with these roles, worst harm first, then the longest. Pure: the screen and its count read the same list. */
-export function whatWaits(tideline: Tideline, roles: readonly Role[]): Waiting[] {
+export function whatWaits(tideline: Batches, roles: readonly Role[]): Waiting[] {
   const names = new Map(tideline.lanes.map((lane) => [lane.processorId, lane.name]));
   const has = (...wanted: Role[]) => wanted.some((role) => roles.includes(role));
   return tideline.batches
@@ -39,7 +41,7 @@ type Found = Omit<Waiting, 'batch'>;
 function pick(
   batch: TidelineBatch,
   processor: string,
-  tideline: Tideline,
+  tideline: Batches,
   has: (...roles: Role[]) => boolean,
 ): Found | null {
   const page = `/batches/${batch.id}`;
@@ -77,7 +79,7 @@ function pick(
 function pickToDo(
   batch: TidelineBatch,
   processor: string,
-  tideline: Tideline,
+  tideline: Batches,
   has: (...roles: Role[]) => boolean,
 ): Found | null {
   const page = `/batches/${batch.id}`;
@@ -140,4 +142,22 @@ function pickToDo(
   if (stage === 'settled' && has('inspector', 'lead'))
     return toDo('Release to stock', batch.contents, 'Release', `${page}/release`);
   return null;
+}
+
+/** Sections of the head in which something can wait. Nonconformances stand under certificates. */
+const SECTION_OF_PAGE: Record<string, keyof WaitingCounts['sections']> = {
+  batches: 'batches',
+  certificates: 'certificates',
+  nonconformances: 'certificates',
+  invoices: 'invoices',
+};
+
+/** How much waits in all, and in each section that what is to be done leads to. */
+export function countWaiting(waiting: readonly Pick<Waiting, 'href'>[]): WaitingCounts {
+  const sections = { batches: 0, certificates: 0, invoices: 0 };
+  for (const { href } of waiting) {
+    const section = SECTION_OF_PAGE[href.split('/')[1] ?? ''];
+    if (section !== undefined) sections[section] += 1;
+  }
+  return { total: waiting.length, sections };
 }

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { getWaitingEndpoint } from '@/lib/tideline/endpoints';
+
+export const GET = serve(getWaitingEndpoint);
