@@ -1,6 +1,4 @@
 'use client';
-import Link from 'next/link';
-
 import { useRead } from '@/components/api/use-api';
 import { useMay } from '@/components/session/use-me';
 import { Empty } from '@/components/ui/empty';
@@ -10,7 +8,14 @@ import { Cell, Row, Table } from '@/components/ui/table';
 import { listLocations } from '@/lib/stock/contract';
 
 import { AddPlace } from './add-place';
+import { PlaceRow } from './place-row';
 import { StockSegments } from './stock-segments';
+
+const COLUMNS = [
+  { says: 'Place' },
+  { says: 'Pieces', right: true },
+  { says: 'What can be done', hidden: true },
+];
 
 /** Shelves, bins and racks by name, with how much lies in each. */
 export function PlacesScreen() {
@@ -32,24 +37,14 @@ export function PlacesScreen() {
         />
       )}
       {data.rows.length > 0 && (
-        <Table
-          label="Places"
-          columns={[{ says: 'Place' }, { says: 'Pieces', right: true }]}
-          keep
-          className="max-w-xl"
-        >
+        <Table label="Places" columns={COLUMNS} keep className="max-w-xl">
           {data.rows.map((place) => (
-            <Row key={place.id} state={place.closed ? 'off' : 'rest'}>
-              <Cell strong>
-                <Link href={`/stock?place=${place.id}`}>{place.name}</Link>
-                {place.closed && <span className="font-normal text-quiet"> closed</span>}
-              </Cell>
-              <Cell figure>{place.pieces > 0 ? place.pieces.toLocaleString('en-US') : ''}</Cell>
-            </Row>
+            <PlaceRow key={place.id} place={place} />
           ))}
           <Row state="sum">
             <Cell>All places</Cell>
             <Cell figure>{total.toLocaleString('en-US')}</Cell>
+            <Cell />
           </Row>
         </Table>
       )}

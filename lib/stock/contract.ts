@@ -36,6 +36,28 @@ export const addLocation = declare({
   response: z.object({ id: Id }),
 });
 
+export const closeLocation = declare({
+  id: 'closeLocation',
+  method: 'post',
+  path: '/stock/locations/{locationId}/close',
+  summary: 'Close an empty place of the stores: nothing goes there any more',
+  side: 'shop',
+  permission: 'stock.release',
+  input: z.object({ locationId: Id }),
+  response: Done,
+});
+
+export const reopenLocation = declare({
+  id: 'reopenLocation',
+  method: 'post',
+  path: '/stock/locations/{locationId}/reopen',
+  summary: 'Open a closed place of the stores again',
+  side: 'shop',
+  permission: 'stock.release',
+  input: z.object({ locationId: Id }),
+  response: Done,
+});
+
 export const StockRow = z.object({
   lotId: Id,
   lotNumber: z.string(),

@@ -31,7 +31,7 @@ async function readLocations(ctx: Ctx): Promise<Location[]> {
   const { rows } = await ctx.tx.execute<Row<Location>>(sql`
     select l.id, l.name, l.closed_at is not null as closed,
       coalesce((select sum(b.pieces)::int from balances b where b.place = 'stock' and b.holder_id = l.id), 0) as pieces
-    from locations l order by l.name`);
+    from locations l order by l.closed_at is not null, l.name`);
   return rows;
 }
 

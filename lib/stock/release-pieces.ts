@@ -29,7 +29,12 @@ export async function releasePieces(ctx: Ctx, { batchId, lines }: Input) {
   authorize(ctx, 'stock.release');
   const batch = await lockSentBatch(ctx, batchId, 'Nothing of it can be released');
   const gate = await readGate(ctx, batchId);
-  const places = await ctx.tx.select({ id: locations.id }).from(locations).where(isNull(locations.closedAt));
+  // Held open until the pieces lie there.
+  const places = await ctx.tx
+    .select({ id: locations.id })
+    .from(locations)
+    .where(isNull(locations.closedAt))
+    .for('share');
   const fields = faultsOf(lines, gate, new Set(places.map((place) => place.id)));
   const [first] = fields;
   if (first) throw new AppError('bad_input', `Nothing was released. ${first.message}`, { fields });

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { closeLocationEndpoint } from '@/lib/stock/endpoints';
+
+export const POST = serve(closeLocationEndpoint);
