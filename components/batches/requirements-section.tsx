@@ -8,6 +8,7 @@ import { Empty } from '@/components/ui/empty';
 import { Section } from '@/components/ui/section';
 import { Cell, Row, Table } from '@/components/ui/table';
 import { getBatch, getBatchLines, type BatchLine, type Requirement } from '@/lib/batches/contract';
+import { limitWords } from '@/lib/parts/limit-words';
 
 import { RequirementEditor } from './requirement-editor';
 
@@ -132,7 +133,7 @@ function Asked({ says, requirements }: { says: string; requirements: readonly Re
         <Row key={one.id}>
           <Cell className="w-2/5">{one.characteristic}</Cell>
           <Cell code strong className="w-2/5">
-            {[one.limit, one.unit].filter(Boolean).join(' ')}
+            {limitWords(one)}
           </Cell>
           <Cell quiet>{one.sourceText || one.source}</Cell>
         </Row>

@@ -1,5 +1,6 @@
 import type { TravellerSays } from '@/lib/batches/paper-contract';
 import { dayWords } from '@/lib/day-words';
+import { limitWords } from '@/lib/parts/limit-words';
 import { PROCESS_WORDS } from '@/lib/trade/process';
 
 // Paper outlives its year, so it names it: seen from here no day is of this year.
@@ -43,7 +44,7 @@ export function TravellerSheet({ says, small = false }: { says: TravellerSays; s
           small={small}
           items={says.requirements.map(
             (one) =>
-              `${one.characteristic} ${[one.limit, one.unit].filter(Boolean).join(' ')}${one.lines.length > 0 ? `, ${one.lines.length === 1 ? 'line' : 'lines'} ${one.lines.join(', ')}` : ''}`,
+              `${one.characteristic} ${limitWords(one)}${one.lines.length > 0 ? `, ${one.lines.length === 1 ? 'line' : 'lines'} ${one.lines.join(', ')}` : ''}`,
           )}
         />
         <SheetList

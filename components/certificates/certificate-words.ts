@@ -1,9 +1,4 @@
-import type {
-  CertificateDetail,
-  CertificateState,
-  ProvedLine,
-  ProvedRequirement,
-} from '@/lib/certificates/contract';
+import type { CertificateDetail, CertificateState, ProvedLine } from '@/lib/certificates/contract';
 
 export const STATE_WORDS: Record<CertificateState, string> = {
   waiting: 'waits to be proved',
@@ -14,9 +9,6 @@ export const STATE_WORDS: Record<CertificateState, string> = {
 /** `26-04177`, or what stands for a number until the inspector has read it. */
 export const certificateName = (certificate: { number: string | null; fileName?: string }): string =>
   certificate.number ?? certificate.fileName ?? 'without number yet';
-
-export const limitWords = ({ limit, unit }: Pick<ProvedRequirement, 'limit' | 'unit'>): string =>
-  [limit, unit].filter(Boolean).join(' ');
 
 /** First and last of a hash: enough for an eye to compare, the whole is in the record. */
 export const shortHash = (sha256: string): string => `${sha256.slice(0, 4)}…${sha256.slice(-4)}`;

@@ -8,8 +8,8 @@ import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { TextArea } from '@/components/ui/field';
 import { DecideRequirement, type ProvedRequirement } from '@/lib/certificates/contract';
+import { limitWords } from '@/lib/parts/limit-words';
 
-import { limitWords } from './certificate-words';
 import type { Proving } from './use-proving';
 
 const Reason = z.object({ reason: DecideRequirement.shape.overrideReason.unwrap().unwrap() });

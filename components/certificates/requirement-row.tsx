@@ -4,8 +4,8 @@ import type { KeyboardEvent } from 'react';
 import { Cell, Row } from '@/components/ui/table';
 import { VerdictWord } from '@/components/ui/verdict';
 import type { ProvedRequirement } from '@/lib/certificates/contract';
+import { limitWords } from '@/lib/parts/limit-words';
 
-import { limitWords } from './certificate-words';
 import { RequirementOpen } from './requirement-open';
 import { RowNumber } from './row-number';
 import type { Proving } from './use-proving';

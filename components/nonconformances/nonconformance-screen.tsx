@@ -18,6 +18,7 @@ import {
   type NonconformanceDetail,
 } from '@/lib/nonconformances/contract';
 import { KIND_WORDS } from '@/lib/nonconformances/kind';
+import { limitWords } from '@/lib/parts/limit-words';
 
 import { doneWords } from './disposition-words';
 import { DispositionForm } from './disposition-form';
@@ -99,9 +100,7 @@ function What({ data }: { data: NonconformanceDetail }) {
       {data.requirement && (
         <p className="text-second">
           {data.requirement.characteristic}: ordered{' '}
-          <span className="num">
-            {[data.requirement.limit, data.requirement.unit].filter(Boolean).join(' ')}
-          </span>
+          <span className="num">{limitWords(data.requirement)}</span>
           {data.requirement.stated && (
             <>
               , stated <span className="num">{data.requirement.stated}</span>

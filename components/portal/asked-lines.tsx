@@ -1,6 +1,7 @@
 import { Caution } from '@/components/ui/edge';
 import { LoadNumber } from '@/components/ui/frame-number';
 import { dayWords, type Clock } from '@/lib/day-words';
+import { limitWords } from '@/lib/parts/limit-words';
 import type { PortalBatch, PortalLine } from '@/lib/portal/contract';
 
 /** What is asked, line by line, and the papers that say it whole. Once it is acknowledged the page is about what comes next. */
@@ -83,8 +84,7 @@ function ToProve({ batch: { requirements } }: { batch: PortalBatch }) {
         {requirements.map((one) => (
           <li key={one.id} className="border-b border-rule py-1.5 [overflow-wrap:anywhere]">
             {one.lineNo !== null && <span className="text-quiet">line {one.lineNo}: </span>}
-            <strong>{one.characteristic}</strong>{' '}
-            <span className="num">{[one.limit, one.unit].filter(Boolean).join(' ')}</span>
+            <strong>{one.characteristic}</strong> <span className="num">{limitWords(one)}</span>
             <span className="text-source text-faint"> {one.sourceText || one.source}</span>
           </li>
         ))}

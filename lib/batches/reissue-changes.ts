@@ -1,5 +1,6 @@
 import { dayWords, type Clock } from '@/lib/day-words';
 import { amountText } from '@/lib/money';
+import { limitWords } from '@/lib/parts/limit-words';
 
 /** What of a batch that has left may still change. */
 export interface StatedTerms extends Clock {
@@ -54,4 +55,4 @@ export function reissueChanges(before: StatedTerms, after: StatedTerms): string[
 }
 
 const asks = ({ limit, unit }: { limit: string; unit: string }): string =>
-  [limit, unit].filter(Boolean).join(' ') || 'no limit';
+  limitWords({ limit, unit }) || 'no limit';

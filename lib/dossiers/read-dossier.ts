@@ -2,6 +2,7 @@ import { sql } from 'drizzle-orm';
 
 import type { Ctx } from '@/lib/auth/context';
 import { notFound } from '@/lib/errors';
+import { limitWords } from '@/lib/parts/limit-words';
 
 import type { DossierBatch, DossierContent, DossierFile } from './content';
 
@@ -71,8 +72,12 @@ async function readMovements(ctx: Pick<Ctx, 'tx'>, lotId: string): Promise<Dossi
   return rows;
 }
 
+type ReadBatch = Omit<DossierBatch, 'requirements'> & {
+  requirements: (DossierBatch['requirements'][number] & { unit: string })[];
+};
+
 async function readBatches(ctx: Pick<Ctx, 'tx'>, lotId: string): Promise<DossierBatch[]> {
-  const { rows } = await ctx.tx.execute<Row<DossierBatch>>(sql`
+  const { rows } = await ctx.tx.execute<Row<ReadBatch>>(sql`
     select b.id, b.number, b.order_number as "orderNumber", p.name as processor, p.address as "processorAddress",
       (select a.reference || ', ' || a.valid_from || ' to ' || a.valid_to from approvals a where a.processor_id = b.processor_id and b.process::text = any (a.processes)
         and a.valid_from <= b.dispatched_at::date and a.valid_to >= b.dispatched_at::date order by a.valid_to desc limit 1) as approval,
@@ -82,7 +87,7 @@ async function readBatches(ctx: Pick<Ctx, 'tx'>, lotId: string): Promise<Dossier
       coalesce((select jsonb_agg(jsonb_build_object('check', o.check, 'reason', o.reason, 'by', (select u.name from users u where u.id = o.by)) order by o.id) from overrides o where o.batch_id = b.id), '[]') as overrides,
       coalesce((select jsonb_agg(jsonb_build_object('at', ${iso('r.received_at')}, 'by', r.received_by, 'good', x.good, 'damaged', x.damaged, 'short', x.short, 'over', x.over) order by r.received_at, r.id)
         from receipt_lines x join receipts r on r.id = x.receipt_id where x.line_id = l.id), '[]') as receipts,
-      coalesce((select jsonb_agg(jsonb_build_object('characteristic', q.characteristic, 'limit', concat_ws(' ', nullif(q.limit, ''), nullif(q.unit, '')),
+      coalesce((select jsonb_agg(jsonb_build_object('characteristic', q.characteristic, 'limit', q.limit, 'unit', q.unit,
           'decisions', coalesce((select jsonb_agg(jsonb_build_object('certificate', coalesce(c.number, 'without number'), 'stated', d.stated, 'verdict', d.verdict, 'overrideReason', d.override_reason, 'by', d.decided_by) order by d.decided_at)
             from decisions d join certificates c on c.id = d.certificate_id where d.requirement_id = q.id), '[]')) order by q.seq, q.id)
         from requirements q where q.batch_id = b.id and (q.line_id is null or q.line_id = l.id)), '[]') as requirements,
@@ -96,7 +101,13 @@ async function readBatches(ctx: Pick<Ctx, 'tx'>, lotId: string): Promise<Dossier
         from releases r where r.line_id = l.id), '[]') as releases
     from batch_lines l join batches b on b.id = l.batch_id join processors p on p.id = b.processor_id
     where l.lot_id = ${lotId} and b.dispatched_at is not null order by b.dispatched_at, b.id`);
-  return rows;
+  return rows.map((batch) => ({
+    ...batch,
+    requirements: batch.requirements.map(({ unit, ...one }) => ({
+      ...one,
+      limit: limitWords({ limit: one.limit, unit }),
+    })),
+  }));
 }
 
 /** Originals that speak for this lot: mill certificate, drawing, papers of its batches, photos of its receipts, concessions. */

@@ -1,6 +1,6 @@
 import { dayWords, momentWords } from '@/lib/day-words';
 import { PROCESS_WORDS } from '@/lib/trade/process';
-import type { PaperContent, TravellerContent } from '@/lib/travellers/content';
+import type { PaperContent } from '@/lib/travellers/content';
 
 // Paper outlives its year, so it always names it: seen from here no day is of this year.
 const ALWAYS_WITH_YEAR = new Date(0);
@@ -33,13 +33,6 @@ export function conditionWords({
   if (conditionBefore && targetCondition) return `${conditionBefore} to ${targetCondition}`;
   return targetCondition ?? conditionBefore ?? '';
 }
-
-/** `63 to 83 HRB` */
-export const limitWords = ({
-  limit,
-  unit,
-}: Pick<TravellerContent['requirements'][number], 'limit' | 'unit'>): string =>
-  [limit, unit].filter(Boolean).join(' ');
 
 /** `lines 1, 3` */
 export function linesWords(lines: readonly number[]): string {
