@@ -1,30 +1,53 @@
 import { sql, type SQL } from 'drizzle-orm';
+import type { z } from 'zod';
 
+import { toPage } from '@/lib/api/paging';
 import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
 import { hashToken } from '@/lib/auth/identify';
 
-import type { HIT_KINDS } from './contract';
+import { HIT_KINDS, type Hit, type HitKind, type listNumbers as listDeclaration } from './contract';
 import { patternsOf } from './patterns';
 
-interface Hit extends Record<string, unknown> {
-  kind: (typeof HIT_KINDS)[number];
-  number: string;
-  says: string;
-  href: string;
-}
+type Row<T> = T & Record<string, unknown>;
 
+/** How many of each kind stand in the list under the field. */
 const EACH = 6;
 
 /**
  * Looks a number up everywhere at once. Each part is a search from the beginning of a number, which its index answers
  * however many rows there are.
  */
-export async function searchNumbers(ctx: Ctx, { text }: { text: string }): Promise<{ hits: Hit[] }> {
+export async function searchNumbers(
+  ctx: Ctx,
+  { text }: { text: string },
+): Promise<{ hits: Hit[]; more: HitKind[] }> {
   authorize(ctx, 'search.use');
-  const { rows } = await ctx.tx.execute<Hit>(byCode(text) ?? everywhere(text));
-  return { hits: rows };
+  const { rows } = await ctx.tx.execute<Row<Hit>>(byCode(text) ?? everywhere(text));
+  const more = HIT_KINDS.filter((kind) => rows.filter((hit) => hit.kind === kind).length > EACH);
+  const hits = rows.filter(
+    (hit, at) => rows.slice(0, at).filter((earlier) => earlier.kind === hit.kind).length < EACH,
+  );
+  return { hits, more };
 }
+
+/** All of one kind; the key of a page is the number with the thing's id, as orders and invoices may share a number. */
+export async function listNumbers(
+  ctx: Ctx,
+  { kind, text, after, limit }: z.output<(typeof listDeclaration)['input']>,
+) {
+  authorize(ctx, 'search.use');
+  const { rows } = await ctx.tx.execute<Row<Found>>(ofKind(kind, { text, after, limit: limit + 1 }));
+  const { rows: found, next } = toPage<Found>(rows, limit, keyOf);
+  return { rows: found.map(({ number, says, href }): Hit => ({ kind, number, says, href })), next };
+}
+
+interface Found extends Hit {
+  key: string;
+  id: string;
+}
+
+const keyOf = ({ key, id }: Found): string => `${id} ${key}`;
 
 /** A scanner types the address in the code: of a traveller, or of the lot on a label. */
 function byCode(text: string): SQL | null {
@@ -44,24 +67,90 @@ const byTraveller = (token: string): SQL => sql`
   where k.token_hash = ${hashToken(token)}`;
 
 function everywhere(text: string): SQL {
-  const like = (column: SQL): SQL =>
-    sql.join(
-      patternsOf(text).map((pattern) => sql`${column} like ${pattern}`),
-      sql` or `,
-    );
-  return sql`
-    (select 'Batch' as kind, b.number, p.name || ', ' || replace(b.stage::text, '_', ' ') as says, '/batches/' || b.id as href
-      from batches b join processors p on p.id = b.processor_id where ${like(sql`b.number`)} order by b.number limit ${EACH})
-    union all (select 'Order', b.order_number, p.name || ', batch ' || b.number, '/batches/' || b.id
-      from batches b join processors p on p.id = b.processor_id where ${like(sql`b.order_number`)} order by b.order_number limit ${EACH})
-    union all (select 'Part', a.number || ' rev ' || a.revision, a.name, '/parts/' || a.id
-      from parts a where a.superseded_at is null and (${like(sql`a.number`)}) order by a.number limit ${EACH})
-    union all (select 'Lot', l.number, a.number || ' rev ' || a.revision || ' ' || a.name, '/lots/' || l.id
-      from lots l join parts a on a.id = l.part_id where ${like(sql`l.number`)} order by l.number limit ${EACH})
-    union all (select 'Certificate', c.number, 'for batch ' || b.number, '/certificates/' || c.id
-      from certificates c join batches b on b.id = c.batch_id where ${like(sql`c.number`)} order by c.number limit ${EACH})
-    union all (select 'Invoice', i.number, p.name || ', batch ' || b.number, '/invoices/' || i.id
-      from invoices i join batches b on b.id = i.batch_id join processors p on p.id = i.processor_id where ${like(sql`i.number`)} order by i.number limit ${EACH})
-    union all (select 'Nonconformance', n.number, n.what, '/nonconformances/' || n.id
-      from nonconformances n where ${like(sql`n.number`)} order by n.number limit ${EACH})`;
+  const parts = HIT_KINDS.map(
+    (kind) => sql`(select kind, number, says, href from (${ofKind(kind, { text, limit: EACH + 1 })}) x)`,
+  );
+  return sql.join(parts, sql` union all `);
+}
+
+interface Searched {
+  /** Where its things stand, the number by which they are found, and what is said of each. */
+  from: SQL;
+  number: SQL;
+  shown?: SQL;
+  id: SQL;
+  says: SQL;
+  page: string;
+  only?: SQL;
+}
+
+const OF_BATCH = sql`batches b join processors p on p.id = b.processor_id`;
+const KINDS: Record<HitKind, Searched> = {
+  Batch: {
+    from: OF_BATCH,
+    number: sql`b.number`,
+    id: sql`b.id`,
+    says: sql`p.name || ', ' || replace(b.stage::text, '_', ' ')`,
+    page: '/batches/',
+  },
+  Order: {
+    from: OF_BATCH,
+    number: sql`b.order_number`,
+    id: sql`b.id`,
+    says: sql`p.name || ', batch ' || b.number`,
+    page: '/batches/',
+  },
+  Part: {
+    from: sql`parts a`,
+    number: sql`a.number`,
+    shown: sql`a.number || ' rev ' || a.revision`,
+    id: sql`a.id`,
+    says: sql`a.name`,
+    page: '/parts/',
+    only: sql`a.superseded_at is null`,
+  },
+  Lot: {
+    from: sql`lots l join parts a on a.id = l.part_id`,
+    number: sql`l.number`,
+    id: sql`l.id`,
+    says: sql`a.number || ' rev ' || a.revision || ' ' || a.name`,
+    page: '/lots/',
+  },
+  Certificate: {
+    from: sql`certificates c join batches b on b.id = c.batch_id`,
+    number: sql`c.number`,
+    id: sql`c.id`,
+    says: sql`'for batch ' || b.number`,
+    page: '/certificates/',
+  },
+  Invoice: {
+    from: sql`invoices i join batches b on b.id = i.batch_id join processors p on p.id = i.processor_id`,
+    number: sql`i.number`,
+    id: sql`i.id`,
+    says: sql`p.name || ', batch ' || b.number`,
+    page: '/invoices/',
+  },
+  Nonconformance: {
+    from: sql`nonconformances n`,
+    number: sql`n.number`,
+    id: sql`n.id`,
+    says: sql`n.what`,
+    page: '/nonconformances/',
+  },
+};
+
+function ofKind(
+  kind: HitKind,
+  { text, after, limit }: { text: string; after?: string | undefined; limit: number },
+): SQL {
+  const { from, number, shown = number, id, says, page, only } = KINDS[kind];
+  const like = sql.join(
+    patternsOf(text).map((pattern) => sql`${number} like ${pattern}`),
+    sql` or `,
+  );
+  const [, afterId, afterNumber] = /^([\da-f-]{36}) (.*)$/.exec(after ?? '') ?? [];
+  const further =
+    afterId === undefined ? sql`` : sql`and (${number}, ${id}) > (${afterNumber}, ${afterId}::uuid)`;
+  return sql`select ${kind}::text as kind, ${shown} as number, ${says} as says, ${page}::text || ${id} as href, ${number} as key, ${id} as id
+    from ${from} where (${like}) ${only ? sql`and ${only}` : sql``} ${further} order by ${number}, ${id} limit ${limit}`;
 }
