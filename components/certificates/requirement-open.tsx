@@ -7,9 +7,10 @@ import { Button } from '@/components/ui/button';
 import { TextField } from '@/components/ui/field';
 import type { ProvedRequirement } from '@/lib/certificates/contract';
 import type { Verdict } from '@/lib/certificates/verdict';
+import { limitWords } from '@/lib/parts/limit-words';
 
+import { linesOf, undecidedAlike } from './alike';
 import { AskForm } from './ask-form';
-import { limitWords } from './certificate-words';
 import { OverrideDialog } from './override-dialog';
 import type { Proving } from './use-proving';
 
@@ -102,6 +103,15 @@ function SourceWords({ requirement }: { requirement: ProvedRequirement }) {
 function Judge({ requirement, proving }: Omit<RequirementOpenProps, 'canEdit'>) {
   const { decision } = requirement;
   const [stated, setStated] = useState(decision?.stated ?? '');
+  const alike = undecidedAlike(requirement, proving.data.requirements);
+  const meetsOnAll = async () => {
+    const all = [requirement, ...alike];
+    proving.onward(
+      requirement.id,
+      all.map((one) => one.id),
+    );
+    await proving.decideAll(all, { verdict: 'meets', stated: stated.trim() || 'as ordered' });
+  };
   const judge = async (verdict: Verdict) => {
     if (verdict === 'meets') proving.onward(requirement.id);
     await proving.decide(requirement, {
@@ -131,6 +141,11 @@ function Judge({ requirement, proving }: Omit<RequirementOpenProps, 'canEdit'>) 
       <Button look="outlined" onClick={() => judge('meets')}>
         Meets
       </Button>
+      {alike.length > 0 && (
+        <Button onClick={meetsOnAll} shortcut="L">
+          Meets on {linesOf([requirement, ...alike])}
+        </Button>
+      )}
       <Button onClick={() => judge('does_not_meet')} shortcut="X">
         Does not meet
       </Button>

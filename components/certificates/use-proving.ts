@@ -6,6 +6,7 @@ import { useMay } from '@/components/session/use-me';
 import { showMessage } from '@/components/ui/message';
 import {
   decideRequirement,
+  decideRequirements,
   getCertificate,
   listCertificates,
   type ProvedRequirement,
@@ -14,6 +15,7 @@ import { readinessOf } from '@/lib/certificates/ready-to-sign';
 import type { Verdict } from '@/lib/certificates/verdict';
 
 import { rowsOf } from './certificate-words';
+import { usePiecesEntered } from './use-pieces-entered';
 
 interface Reading {
   stated?: string;
@@ -27,7 +29,9 @@ export function useProving(certificateId: string) {
   const { data } = useRead(getCertificate, { certificateId });
   const mayProve = useMay('certificate.prove');
   const [selected, setSelected] = useState<string | null>(null);
-  const [pieces, setPieces] = useState<Record<string, number | null>>({});
+  const entering = usePiecesEntered(certificateId, data.lines);
+  const { pieces } = entering;
+  const writeAll = useWrite(decideRequirements, { refreshes: [getCertificate, listCertificates] });
   const write = useWrite(decideRequirement, { refreshes: [getCertificate, listCertificates] });
 
   const coverage = data.lines.map((line) => ({ lineId: line.id, pieces: pieces[line.id] ?? 0 }));
@@ -47,9 +51,9 @@ export function useProving(certificateId: string) {
     focusRow(rowId);
   };
   /** On to the next row that is still to decide; where none is left, to the next row. */
-  const onward = (from: string) => {
+  const onward = (from: string, decidedWithIt: readonly string[] = []) => {
     const after = rows.slice(rows.indexOf(from) + 1);
-    toRow(after.find((rowId) => !isDecided(rowId)) ?? after[0]);
+    toRow(after.find((rowId) => !isDecided(rowId) && !decidedWithIt.includes(rowId)) ?? after[0]);
   };
 
   const decide = async (
@@ -66,11 +70,19 @@ export function useProving(certificateId: string) {
       overrideReason,
       note: note ?? decision?.note ?? '',
     };
-    await write
-      .mutateAsync(input)
-      .catch((error: unknown) =>
-        showMessage({ says: error instanceof Error ? error.message : 'Not saved.', failed: true }),
-      );
+    await write.mutateAsync(input).catch(tellFailure);
+  };
+
+  /** The same for several at once: one statement on the page that speaks for them all. */
+  const decideAll = async (
+    requirements: readonly ProvedRequirement[],
+    { stated, verdict }: { stated: string; verdict: Verdict },
+  ) => {
+    const versions = requirements.map(({ id, decision }) => ({
+      requirementId: id,
+      version: decision?.version ?? null,
+    }));
+    await writeAll.mutateAsync({ certificateId, requirements: versions, stated, verdict }).catch(tellFailure);
   };
 
   return {
@@ -82,9 +94,8 @@ export function useProving(certificateId: string) {
     toRow,
     onward,
     decide,
-    pieces,
-    setPieces: (lineId: string, count: number | null) => setPieces((now) => ({ ...now, [lineId]: count })),
-    forgetPieces: () => setPieces({}),
+    decideAll,
+    ...entering,
     coverage: coverage.filter((line) => line.pieces > 0),
     readiness,
     rows,
@@ -92,6 +103,9 @@ export function useProving(certificateId: string) {
   };
 }
 export type Proving = ReturnType<typeof useProving>;
+
+const tellFailure = (error: unknown) =>
+  showMessage({ says: error instanceof Error ? error.message : 'Not saved.', failed: true });
 
 /** The row that opens is drawn with the next frame; the focus waits for it. */
 function focusRow(rowId: string) {

@@ -239,6 +239,24 @@ export const decideRequirement = declare({
   response: z.object({ version: z.int() }),
 });
 
+export const DecideRequirements = DecideRequirement.omit({ requirementId: true, version: true }).extend({
+  requirements: z
+    .array(DecideRequirement.pick({ requirementId: true, version: true }))
+    .min(1, 'Choose at least one requirement.')
+    .max(500),
+});
+
+export const decideRequirements = declare({
+  id: 'decideRequirements',
+  method: 'post',
+  path: '/certificates/{certificateId}/decisions',
+  summary: 'Decide the same of several requirements at once: all of them, or none',
+  side: 'shop',
+  permission: 'certificate.prove',
+  input: DecideRequirements,
+  response: z.object({ decided: z.int() }),
+});
+
 export const setAsideCertificate = declare({
   id: 'setAsideCertificate',
   method: 'post',

@@ -4,6 +4,7 @@ import { tryPasswordAgain } from '@/lib/people/try-password-again';
 import { addCertificate } from './add-certificate';
 import * as contract from './contract';
 import { decideRequirement } from './decide-requirement';
+import { decideRequirements } from './decide-requirements';
 import { getCertificate } from './get-certificate';
 import { listCertificates } from './list-certificates';
 import { recordCertificate } from './record-certificate';
@@ -16,6 +17,7 @@ export const getCertificateEndpoint = endpoint(contract.getCertificate, getCerti
 export const addCertificateEndpoint = endpoint(contract.addCertificate, addCertificate);
 export const recordCertificateEndpoint = endpoint(contract.recordCertificate, recordCertificate);
 export const decideRequirementEndpoint = endpoint(contract.decideRequirement, decideRequirement);
+export const decideRequirementsEndpoint = endpoint(contract.decideRequirements, decideRequirements);
 export const setAsideCertificateEndpoint = endpoint(contract.setAsideCertificate, setAsideCertificate);
 export const takeUpCertificateEndpoint = endpoint(contract.takeUpCertificate, takeUpCertificate);
 export const signCertificateEndpoint = endpointInSteps(contract.signCertificate, {

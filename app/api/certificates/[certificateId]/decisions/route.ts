@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { decideRequirementsEndpoint } from '@/lib/certificates/endpoints';
+
+export const POST = serve(decideRequirementsEndpoint);
