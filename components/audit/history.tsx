@@ -3,6 +3,7 @@ import { useLazyRead } from '@/components/api/use-api';
 import { Section } from '@/components/ui/section';
 import { getMe } from '@/lib/session/contract';
 
+import { historyOf } from './history-of';
 import { Trail } from './trail';
 
 interface HistoryProps {
@@ -12,12 +13,12 @@ interface HistoryProps {
   title?: string;
 }
 
-/** What happened to one thing. Read when it is shown, so no page waits for it. */
+/** What happened to one thing. Read when it is shown, where the page has not laid it in. */
 export function History({ entity, id, title = 'History' }: HistoryProps) {
   const { data: me } = useLazyRead(getMe, {});
   return (
     <Section title={title} note="newest first">
-      <Trail asked={{ entity, entityId: id, limit: 20 }} zone={me?.organisation.zone ?? 'UTC'} ofOneThing />
+      <Trail asked={historyOf(entity, id)} zone={me?.organisation.zone ?? 'UTC'} ofOneThing />
     </Section>
   );
 }
