@@ -18,7 +18,7 @@ export function ApiDocs({ operations, holders, address }: ApiDocsProps) {
   return (
     <>
       <PageHead
-        title="For programs"
+        title="The API"
         sub={`${operations.length} reads and writes. The screens use these and no others.`}
       />
       <div className="flex flex-col gap-7">
@@ -64,10 +64,12 @@ function Operation({ operation, holders }: { operation: ReadableOperation; holde
   const { id, method, path, summary, side, permission, input, output } = operation;
   return (
     <details id={id} className="border-b border-rule">
-      <summary className="flex cursor-pointer flex-wrap items-baseline gap-x-3 py-2 touch:min-h-12">
-        <span className="num w-14 font-semibold">{method}</span>
-        <span className="num min-w-0 break-all">{path}</span>
-        <span className="text-quiet">{summary}</span>
+      <summary className="grid cursor-pointer grid-cols-[3.5rem_minmax(0,1fr)] items-baseline gap-x-3 py-2 touch:min-h-12">
+        <span className="num font-semibold">{method}</span>
+        <span>
+          <span className="num mr-3 break-all">{path}</span>
+          <span className="text-quiet">{summary}</span>
+        </span>
       </summary>
       <div className="flex flex-col gap-4 pt-1 pb-5 md:pl-[4.25rem]">
         <p className="text-second">

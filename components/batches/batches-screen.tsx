@@ -107,8 +107,9 @@ function BatchLine({ row, clock }: { row: BatchRow; clock: Clock }) {
       <Cell figure head="Pieces">
         {isPart ? <Pieces count={row.piecesBack} of={row.pieces} /> : row.pieces.toLocaleString('en-US')}
       </Cell>
-      <Cell head="Left">{leftWords(row, clock, day)}</Cell>
-      <Cell head="Back">
+      {/* "Leaves 3 Dec" and "promised 8 Dec" say their column themselves. */}
+      <Cell {...(row.dispatchedAt ? { head: 'Left' } : {})}>{leftWords(row, clock, day)}</Cell>
+      <Cell {...(row.lastBackAt ? { head: 'Back' } : {})}>
         {row.daysLate > 0 ? (
           <strong className="text-held-ink">{row.daysLate} d late</strong>
         ) : (

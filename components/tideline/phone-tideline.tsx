@@ -5,6 +5,10 @@ import { daysBetween } from '@/lib/tideline/lateness';
 import { phoneGroups } from '@/lib/tideline/phone-groups';
 
 const LONGEST_STEM_DAYS = 20;
+/** Rows are of one height, so that a stem knows how far it is to the line. */
+const ROW_REM = 4.25;
+/** More than these would run into the words at the left. */
+const MOST_STEMS = 3;
 
 /** The vertical form: held and late above the line of today, with a rung a day down to it; below, when the rest comes back. */
 export function PhoneTideline({ tideline }: { tideline: Tideline }) {
@@ -15,12 +19,13 @@ export function PhoneTideline({ tideline }: { tideline: Tideline }) {
     <div className="-mx-4">
       {above.length > 0 && (
         <ol aria-label="Held and late" className="bg-bench px-4 pt-3">
-          {above.map(({ batch, late }) => (
+          {above.map(({ batch, late }, at) => (
             <PhoneRow
               key={batch.id}
               batch={batch}
               processor={names.get(batch.processorId) ?? ''}
               late={late}
+              stem={stemOf(above, at)}
               first={late > 0 ? `${late} d late` : heldWords(batch, tideline)}
               second={
                 batch.stage === 'held'
@@ -41,7 +46,7 @@ export function PhoneTideline({ tideline }: { tideline: Tideline }) {
       </p>
       {below.map((group) => (
         <section key={group.name} aria-label={group.name} className="px-4 pt-3">
-          <h2 className="flex items-center gap-3 text-sub font-semibold text-quiet after:h-px after:flex-1 after:bg-rule">
+          <h2 className="flex items-center gap-3 pb-1.5 text-sub font-semibold text-quiet after:h-px after:flex-1 after:bg-rule">
             {group.name}
           </h2>
           <ol>
@@ -81,16 +86,20 @@ interface PhoneRowProps {
   late: number;
   first: string;
   second: string;
+  stem?: { at: number; rows: number } | null;
 }
 
-function PhoneRow({ batch, processor, late, first, second }: PhoneRowProps) {
+function PhoneRow({ batch, processor, late, first, second, stem }: PhoneRowProps) {
   return (
-    <li className="relative grid grid-cols-[84px_minmax(0,1fr)] gap-x-2 pb-3">
+    <li
+      className="relative grid grid-cols-[5.25rem_minmax(0,1fr)] gap-x-2"
+      style={{ height: `${ROW_REM}rem` }}
+    >
       <div>
         <p className={`font-cond text-sub font-semibold ${late > 0 ? 'text-held-ink' : ''}`}>{first}</p>
         <p className="num text-quiet">{second}</p>
       </div>
-      {late > 0 && <Stem days={late} />}
+      {stem && <Stem days={late} {...stem} />}
       <div className="min-w-0">
         <BatchTag
           stage={batch.stage}
@@ -114,16 +123,28 @@ function PhoneRow({ batch, processor, late, first, second }: PhoneRowProps) {
   );
 }
 
-/** One rung a day beside the tag; over twenty days the stem is broken. */
-function Stem({ days }: { days: number }) {
+/** Which stem of the late ones it is, and how many rows it goes down. */
+function stemOf(above: readonly { late: number }[], row: number): { at: number; rows: number } | null {
+  const at = above.slice(0, row).filter(({ late }) => late > 0).length;
+  return (above[row]?.late ?? 0) > 0 && at < MOST_STEMS ? { at, rows: above.length - row } : null;
+}
+
+/** From the tag down to the line of today, one rung a day; over twenty days it is broken. */
+function Stem({ days, at, rows }: { days: number; at: number; rows: number }) {
   const rungs = Math.min(days, LONGEST_STEM_DAYS);
-  const path = Array.from({ length: rungs }, (_, at) => `M0 ${2 + (at * 44) / Math.max(rungs, 1)}h6`).join(
-    '',
-  );
   return (
-    <svg aria-hidden="true" width="8" height="48" className="absolute top-1 left-[74px]">
-      <path d={`M0.5 2V46${path}`} fill="none" stroke="var(--held-ink)" />
-      {days > LONGEST_STEM_DAYS && <path d="M-3 26l8 -4M-3 30l8 -4" stroke="var(--bench)" strokeWidth="3" />}
-    </svg>
+    <span
+      aria-hidden="true"
+      className="absolute top-1 w-1.5 border-l border-held-ink"
+      style={{
+        left: `${4.75 - at * 0.5}rem`,
+        height: `${rows * ROW_REM - 0.25}rem`,
+        backgroundImage: `repeating-linear-gradient(var(--held-ink) 0 1px, transparent 1px calc(100% / ${rungs}))`,
+      }}
+    >
+      {days > LONGEST_STEM_DAYS && (
+        <span className="absolute top-1/2 -left-1 h-1.5 w-3 -rotate-12 border-y border-held-ink bg-bench" />
+      )}
+    </span>
   );
 }

@@ -14,9 +14,10 @@ interface SegmentsProps {
   items: readonly (SegmentBase & { href: string })[];
 }
 
-const BOX = 'inline-flex flex-wrap border border-ink [&>*+*]:border-l [&>*+*]:border-rule';
+/** Each item draws its own frame over its neighbour's, so that a list that wraps leaves no empty box. */
+const BOX = 'inline-flex flex-wrap pt-px pl-px';
 const item = (current: boolean) =>
-  `inline-flex min-h-[34px] touch:min-h-12 items-center gap-2 px-3 font-cond text-word no-underline focus-visible:z-10 relative ${
+  `inline-flex -mt-px -ml-px min-h-9 touch:min-h-12 items-center gap-2 border border-ink px-3 font-cond text-word no-underline focus-visible:z-10 relative ${
     current ? 'bg-ink text-paper' : 'hover:bg-bench'
   }`;
 

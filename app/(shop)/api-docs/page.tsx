@@ -8,7 +8,7 @@ import { PERMISSIONS } from '@/lib/auth/permissions';
 import { env } from '@/lib/env';
 import { getMeEndpoint } from '@/lib/session/endpoints';
 
-export const metadata: Metadata = { title: 'For programs' };
+export const metadata: Metadata = { title: 'The API' };
 
 export default async function ApiDocsPage() {
   await readOnServer(getMeEndpoint, {});
