@@ -52,6 +52,8 @@ describe('a specification as people write it', () => {
     ['EN 4179:2017', 'EN', 'EN 4179', '2017', ''],
     ['ISO 2859-1:1999', 'ISO', 'ISO 2859-1', '1999', ''],
     ['ANSI/ASQ Z1.4-2008', 'ANSI', 'ANSI/ASQ Z1.4', '2008', ''],
+    ['ANSI/ASQC Z1.4-1993', 'ANSI', 'ANSI/ASQ Z1.4', '1993', ''],
+    ['AMS 2770/2771/2772', 'AMS', 'AMS2770', null, '2771/2772'],
     ['ANSI/NCSL Z540-1', 'ANSI', 'ANSI/NCSL Z540-1', null, ''],
     ['DTD36B', 'DTD', 'DTD 36', 'B', ''],
     ['DTD 390', 'DTD', 'DTD 390', null, ''],

@@ -34,27 +34,27 @@ const sheet = (slash: string | undefined): string => (slash ? `/${slash}` : '');
 const SPELLINGS: readonly Spelling[] = [
   {
     body: 'AMS',
-    pattern: /(?:SAE[\s-]*)?AMS[\s-]*(QQ|WW|TT)[\s-]*([A-Z])[\s-]*(\d{1,4})(?:\/(\d+))?/iy,
+    pattern: /(?:SAE[\s-]*)?AMS[\s-]*(QQ|WW|TT)[\s-]*([A-Z])[\s-]*(\d{1,4})(?:\/(\d{1,3})(?!\d))?/iy,
     number: ([prefix, letter, digits, slash]) => `AMS-${prefix}-${letter}-${digits}${sheet(slash)}`,
   },
   {
     body: 'AMS',
-    pattern: /(?:SAE[\s-]*)?AMS[\s-]*(STD|[A-Z])[\s-]*(\d{4,6})(?:\/(\d+))?/iy,
+    pattern: /(?:SAE[\s-]*)?AMS[\s-]*(STD|[A-Z])[\s-]*(\d{4,6})(?:\/(\d{1,3})(?!\d))?/iy,
     number: ([prefix, digits, slash]) => `AMS-${prefix}-${digits}${sheet(slash)}`,
   },
   {
     body: 'AMS',
-    pattern: /(?:SAE[\s-]*)?AMS[\s-]*(\d{4})(?:\/(\d+))?/iy,
+    pattern: /(?:SAE[\s-]*)?AMS[\s-]*(\d{4})(?:\/(\d{1,3})(?!\d))?/iy,
     number: ([digits, slash]) => `AMS${digits}${sheet(slash)}`,
   },
   {
     body: 'MIL',
-    pattern: /MIL[\s-]*(DTL|PRF|STD|HDBK)[\s-]*(\d{1,6})(?:\/(\d+))?/iy,
+    pattern: /MIL[\s-]*(DTL|PRF|STD|HDBK)[\s-]*(\d{1,6})(?:\/(\d{1,3})(?!\d))?/iy,
     number: ([prefix, digits, slash]) => `MIL-${prefix}-${digits}${sheet(slash)}`,
   },
   {
     body: 'MIL',
-    pattern: /MIL[\s-]*([A-Z])[\s-]*(\d{3,6})(?:\/(\d+))?/iy,
+    pattern: /MIL[\s-]*([A-Z])[\s-]*(\d{3,6})(?:\/(\d{1,3})(?!\d))?/iy,
     number: ([prefix, digits, slash]) => `MIL-${prefix}-${digits}${sheet(slash)}`,
   },
   {
@@ -64,7 +64,7 @@ const SPELLINGS: readonly Spelling[] = [
   },
   {
     body: 'FED',
-    pattern: /(QQ|TT|WW)[\s-]*([A-Z])[\s-]*(\d{1,4})(?:\/(\d+))?/iy,
+    pattern: /(QQ|TT|WW)[\s-]*([A-Z])[\s-]*(\d{1,4})(?:\/(\d{1,3})(?!\d))?/iy,
     number: ([prefix, letter, digits, slash]) => `${prefix}-${letter}-${digits}${sheet(slash)}`,
   },
   {
@@ -95,9 +95,11 @@ const SPELLINGS: readonly Spelling[] = [
     number: ([digits, part]) => `ISO ${digits}${part ?? ''}`,
   },
   {
+    // The society has dropped a letter; the standard is the same.
     body: 'ANSI',
     pattern: /ANSI\/(ASQC?|NCSL)[\s-]*(Z\d{1,3}(?:\.\d+)?)(-\d(?!\d))?/iy,
-    number: ([society, digits, part]) => `ANSI/${society} ${digits}${part ?? ''}`,
+    number: ([society, digits, part]) =>
+      `ANSI/${society === 'ASQC' ? 'ASQ' : society} ${digits}${part ?? ''}`,
   },
   { body: 'DTD', pattern: /DTD[\s-]*(\d{1,4})/iy, number: ([digits]) => `DTD ${digits}` },
   {
