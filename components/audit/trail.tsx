@@ -10,7 +10,7 @@ import { Loading } from '@/components/ui/loading';
 import { Cell, Row, Table } from '@/components/ui/table';
 import type { InputOf } from '@/lib/api/endpoint';
 import { listAudit, type AuditEntry } from '@/lib/audit/contract';
-import { actionWords, changesBetween, kindWords, pageOfThing } from '@/lib/audit/words';
+import { actionWords, changesBetween, jobWords, kindWords, pageOfThing } from '@/lib/audit/words';
 
 interface TrailProps {
   asked: InputOf<typeof listAudit>;
@@ -73,7 +73,7 @@ function TrailRow({ entry, zone, ofOneThing }: { entry: AuditEntry; zone: string
         <Moment at={new Date(entry.at)} clock={{ zone, now: new Date() }} />
       </Cell>
       <Cell head="Who">
-        {entry.actorName}
+        {entry.actorKind === 'job' ? 'Lotwright' : entry.actorName}
         <span className="text-quiet">{actorNote(entry)}</span>
       </Cell>
       {!ofOneThing && (
@@ -84,7 +84,7 @@ function TrailRow({ entry, zone, ofOneThing }: { entry: AuditEntry; zone: string
       <Cell head="What" strong>
         {actionWords(entry.action)}
       </Cell>
-      <Cell head="Change">
+      <Cell>
         <Changes entry={entry} />
       </Cell>
       <Cell head="No." figure>
@@ -94,11 +94,11 @@ function TrailRow({ entry, zone, ofOneThing }: { entry: AuditEntry; zone: string
   );
 }
 
-function actorNote({ actorKind, address }: AuditEntry): string {
+function actorNote({ actorKind, actorName, address }: AuditEntry): string {
   const by: Record<string, string> = {
     token: ', with a token',
     link: ', by the mailed link',
-    job: ', by itself',
+    job: `, ${jobWords(actorName)}`,
   };
   return `${by[actorKind] ?? ''}${address === null ? '' : `, from ${address}`}`;
 }

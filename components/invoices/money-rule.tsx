@@ -42,23 +42,31 @@ export function MoneyRule({ invoice }: { invoice: InvoiceDetail }) {
           />
         )}
         {placed.map((label) => (
-          <g key={label.says}>
-            <path
-              d={`M${label.x} ${label.row * ROW + 20}V${line}`}
-              stroke={COLOURS[label.tone]}
-              strokeWidth="2"
-            />
-            <text
-              x={label.left}
-              y={label.row * ROW + 14}
-              fontSize="14.5"
-              fontWeight="600"
-              className="font-cond"
-              style={{ fill: COLOURS[label.tone] }}
-            >
-              {label.says}
-            </text>
-          </g>
+          <path
+            key={label.says}
+            d={`M${label.x} ${label.row * ROW + 20}V${line}`}
+            stroke={COLOURS[label.tone]}
+            strokeWidth="2"
+          />
+        ))}
+        {/* After all lines and with paper around them, so that no line runs through a word. */}
+        {placed.map((label) => (
+          <text
+            key={label.says}
+            x={label.left}
+            y={label.row * ROW + 14}
+            fontSize="14.5"
+            fontWeight="600"
+            className="font-cond"
+            style={{
+              fill: COLOURS[label.tone],
+              stroke: 'var(--paper)',
+              strokeWidth: 6,
+              paintOrder: 'stroke',
+            }}
+          >
+            {label.says}
+          </text>
         ))}
       </svg>
     </div>

@@ -49,7 +49,7 @@ function ColleagueRow({ person }: { person: Colleague }) {
     );
   return (
     <Row state={active ? 'rest' : 'off'}>
-      <Cell strong head="Name">
+      <Cell strong>
         {name}
         {isMe && <span className="font-normal text-quiet"> you</span>}
       </Cell>

@@ -61,7 +61,7 @@ export function ProcessorBatches({ processorId, now }: { processorId: string; no
 function BatchLine({ row, clock }: { row: BatchRow; clock: Clock }) {
   return (
     <Row>
-      <Cell head="Batch">
+      <Cell>
         <BatchTag stage={row.stage} number={row.number} size="row" href={`/batches/${row.id}`} />
       </Cell>
       <Cell code head="Order">

@@ -82,7 +82,7 @@ export function ProcessorsScreen() {
 function ProcessorLine({ row, clock }: { row: ProcessorRow; clock: Clock }) {
   return (
     <Row state={row.active ? 'rest' : 'off'}>
-      <Cell strong head="Processor">
+      <Cell strong>
         <Link href={`/processors/${row.processorId}`}>{row.name}</Link>
         {!row.active && <span className="font-normal text-quiet"> no longer used</span>}
       </Cell>

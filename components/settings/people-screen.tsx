@@ -81,7 +81,7 @@ function PersonRows({ person, isOpen, toggle }: { person: TeamMember; isOpen: bo
   return (
     <>
       <Row state={person.active ? 'rest' : 'off'} selected={isOpen}>
-        <Cell strong head="Name">
+        <Cell strong>
           {person.name}
           {person.isMe && <span className="font-normal text-quiet"> you</span>}
         </Cell>
@@ -116,9 +116,7 @@ function InvitationRow({ invitation }: { invitation: PendingInvitation }) {
   });
   return (
     <Row>
-      <Cell strong head="Name">
-        {name}
-      </Cell>
+      <Cell strong>{name}</Cell>
       <Cell head="E-mail">{email}</Cell>
       <Cell head="Roles">{roles.join(', ')}</Cell>
       <Cell head="Ends">

@@ -28,14 +28,14 @@ export function SettingsFrame({ children }: { children: ReactNode }) {
     <div className="grid grid-cols-1 gap-x-9 lg:grid-cols-[11.5rem_minmax(0,1fr)]">
       <nav
         aria-label="Settings"
-        className="flex flex-wrap gap-x-6 border-rule pt-4 max-lg:border-b max-lg:pb-1 lg:flex-col lg:pt-5"
+        className="flex flex-wrap gap-x-6 border-rule pt-4 max-lg:border-b max-lg:pb-1 max-md:-mx-4 max-md:flex-nowrap max-md:overflow-x-auto max-md:px-4 max-md:pt-1 lg:flex-col lg:pt-5"
       >
         {pages.map(({ says, href }) => (
           <Link
             key={href}
             href={href}
             aria-current={path === href ? 'page' : undefined}
-            className={`flex items-center py-1.5 font-cond text-sub no-underline hover:text-ink touch:min-h-12 ${path === href ? 'text-ink underline decoration-2 underline-offset-4' : 'font-normal text-quiet'}`}
+            className={`flex flex-none items-center py-1.5 font-cond text-sub no-underline hover:text-ink touch:min-h-12 ${path === href ? 'text-ink underline decoration-2 underline-offset-4' : 'font-normal text-quiet'}`}
           >
             {says}
           </Link>

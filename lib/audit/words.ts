@@ -9,6 +9,16 @@ export function actionWords(action: string): string {
   return verb.replaceAll(/[._]/g, ' ');
 }
 
+const JOBS: Record<string, string> = {
+  'render-documents': 'making papers',
+  'assemble-dossier': 'putting a dossier together',
+  'pay-invoice': 'paying',
+  'work-payment-event': 'told by the payment service',
+};
+
+/** What the background work was at when it did something. */
+export const jobWords = (queue: string): string => JOBS[queue] ?? 'by itself';
+
 const PAGES: Record<string, string> = {
   batch: '/batches',
   lot: '/lots',
