@@ -186,7 +186,9 @@ function cell(value: string, at: number, columns: readonly Column[], closes = fa
         textAlign: figure ? 'right' : 'left',
         verticalAlign: 'top',
         fontWeight: closes ? 600 : 400,
-        ...(figure || code ? { fontFamily: MONO, fontSize: 13, whiteSpace: 'nowrap' as const } : {}),
+        ...(figure || (code && !closes)
+          ? { fontFamily: MONO, fontSize: 13, whiteSpace: 'nowrap' as const }
+          : {}),
       }}
     >
       {value}

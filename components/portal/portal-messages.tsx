@@ -29,7 +29,7 @@ export function PortalMessages({ batchId, clock }: { batchId: string; clock: Clo
   const quietly = (work: Promise<unknown>) => work.catch(() => undefined);
 
   return (
-    <Section id="messages" title="Questions, answers, trouble" note={thread.other} className="pt-1">
+    <Section id="messages" title="Questions, answers, trouble" note={thread.other} className="pt-1 pb-4">
       {thread.messages.length === 0 ? (
         <p className="text-quiet">
           Nothing was said yet. What you write goes to {thread.other} as a mail and stays with the batch.

@@ -5,6 +5,7 @@ import { readReadiness } from '@/lib/assemblies/readiness';
 import { authorize } from '@/lib/auth/authorize';
 import { shopOf, type Ctx } from '@/lib/auth/context';
 import { notFound } from '@/lib/errors';
+import { contentsWords } from '@/lib/parts/contents-words';
 
 import type { TidelineBatch, TidelineLane } from './contract';
 
@@ -42,9 +43,9 @@ export async function readTideline(ctx: Ctx) {
 async function readBatches(ctx: Ctx, zone: string): Promise<TidelineBatch[]> {
   const day = (column: string) =>
     sql.raw(`(${column} at time zone '${zone.replaceAll("'", "''")}')::date::text`);
-  const { rows } = await ctx.tx.execute<TidelineBatch & Record<string, unknown>>(sql`
+  const { rows } = await ctx.tx.execute<Omit<TidelineBatch, 'contents'> & { names: string[] }>(sql`
     select b.id, b.number, b.stage, b.processor_id as "processorId", b.pieces, b.pieces_back as "piecesBack",
-      coalesce(line.contents, 'nothing yet') as contents, b.leaves_on::text as "leavesOn", ${day('b.dispatched_at')} as "dispatchedOn",
+      coalesce(line.names, '{}') as names, b.leaves_on::text as "leavesOn", ${day('b.dispatched_at')} as "dispatchedOn",
       b.acknowledged_at is not null as acknowledged, b.wanted_back_on::text as "wantedBackOn", b.promised_on::text as "promisedOn",
       b.first_promised_on::text as "firstPromisedOn", coalesce(promise.broken, '{}') as "brokenPromises",
       ${day('b.last_back_at')} as "lastBackOn", coalesce(receipt.days, '{}') as "receiptsOn",
@@ -53,8 +54,8 @@ async function readBatches(ctx: Ctx, zone: string): Promise<TidelineBatch[]> {
       invoice.said as invoice, need.said as assembly
     from batches b
     left join lateral (
-      select case when count(distinct a.number) = 1 then sum(l.pieces) || ' ' || lower(min(a.name)) else sum(l.pieces) || ' pieces of ' || count(distinct a.number) || ' parts' end as contents
-      from batch_lines l join lots o on o.id = l.lot_id join parts a on a.id = o.part_id where l.batch_id = b.id having count(*) > 0
+      select array_agg(part.name) as names from (select a.number, min(a.name) as name
+        from batch_lines l join lots o on o.id = l.lot_id join parts a on a.id = o.part_id where l.batch_id = b.id group by a.number) part
     ) line on true
     left join lateral (
       select array_agg(p.promised_on::text order by p.made_at) as broken from promises p where p.batch_id = b.id and p.promised_on <> b.promised_on
@@ -88,7 +89,7 @@ async function readBatches(ctx: Ctx, zone: string): Promise<TidelineBatch[]> {
     where b.put_aside_at is null and (b.stage in ('building', 'dispatched', 'at_processor', 'returned', 'proved', 'settled', 'held')
       or (b.stage = 'stocked' and b.stocked_at > ${ctx.now.toISOString()}::timestamptz - make_interval(days => ${STAYS_DAYS})))
     order by coalesce(b.dispatched_at, b.created_at), b.id`);
-  return rows;
+  return rows.map(({ names, ...batch }) => ({ ...batch, contents: contentsWords(batch.pieces, names) }));
 }
 
 async function readLanes(ctx: Ctx, processorIds: readonly string[]): Promise<TidelineLane[]> {

@@ -27,7 +27,7 @@ export default async function LinkPage({ params, searchParams }: LinkPageProps) 
   return (
     <PortalShell
       shop={batch.shop}
-      call={batch.shopPhone === null ? undefined : { says: 'Call', phone: batch.shopPhone }}
+      call={batch.shopPhone === null ? undefined : { says: 'Call the shop', phone: batch.shopPhone }}
     >
       <LinkOpen
         batch={batch}
