@@ -1,13 +1,17 @@
+import { readMaterial } from '@/lib/trade/alloys/read-material';
+import { cautionsFor } from '@/lib/trade/cautions/cautions-for';
 import type { Process } from '@/lib/trade/process';
+import { CAUTIONS } from '@/lib/trade/tables/cautions';
+import { TEMPER_DESIGNATIONS } from '@/lib/trade/tables/tempers';
 
 /**
- * What stands on every traveller. Cautions of a process come with the trade library and its sources; none is made up
- * here.
+ * What stands on a traveller: the customary cautions of the process and of the metals in the batch. A material that is
+ * not recognised adds none.
  */
-export function cautionsOf(_process: Process): string[] {
-  return [
-    'Only the work asked here, to the specification at the revision named.',
-    'Keep the lots apart; each line comes back with its lot number.',
-    'If anything here and the order differ, stop and call.',
-  ];
+export function cautionsOf(process: Process, materials: readonly string[]): string[] {
+  const families = materials.flatMap((written) => {
+    const material = readMaterial(TEMPER_DESIGNATIONS, written);
+    return material.ok ? [material.family] : [];
+  });
+  return cautionsFor(CAUTIONS, { process, families, papers: true }).map(({ says }) => says);
 }

@@ -56,7 +56,10 @@ export async function readPaperContents(
       ...stated,
       ...copied(versions.traveller),
       lines: lines.map(({ unitPriceMinor: _, ...line }) => line),
-      cautions: cautionsOf(batch.process),
+      cautions: cautionsOf(
+        batch.process,
+        lines.map(({ material }) => material),
+      ),
       overrides: await readPassed(ctx, batchId),
       link: link === null ? null : { base: `${env.APP_URL}/b/`, linkId: link },
     },
