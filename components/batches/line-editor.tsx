@@ -100,7 +100,7 @@ export function LineEditor({ batch, line, onDone }: { batch: Batch; line: BatchL
         value={typed.load}
         onChange={(event) => setTyped({ ...typed, load: event.currentTarget.value })}
       />
-      <span className="flex flex-wrap items-center gap-3 pt-[21px]">
+      <span className="flex flex-wrap items-center gap-3 pt-6">
         <Button type="submit" busy={change.busy} busyLabel="Saving">
           {`Save line ${line.lineNo}`}
         </Button>

@@ -106,7 +106,7 @@ export function RequirementEditor({ batch, lineId, says, requirements, onDone }:
               error={faults?.sourceText?.message}
               {...register(`requirements.${at}.sourceText`)}
             />
-            <span className="pt-[27px]">
+            <span className="pt-[30px]">
               <Button look="word" aria-label={`Remove requirement ${at + 1}`} onClick={() => rows.remove(at)}>
                 Remove
               </Button>

@@ -87,7 +87,7 @@ function NumberAndDate({ proving }: { proving: Proving }) {
         error={errors.datedOn?.message}
         {...form.register('datedOn')}
       />
-      <span className="pt-[27px] text-second text-quiet max-md:pt-0" role="status">
+      <span className="pt-[30px] text-second text-quiet max-md:pt-0" role="status">
         {errors.root?.message ??
           savedWords({ isDirty, isPending: write.isPending, isThere: certificate.number !== null })}
       </span>

@@ -175,7 +175,7 @@ function Entering({ line, proving }: { line: ProvedLine; proving: Proving }) {
         onChange={(event) => type(event.currentTarget.value)}
         onKeyDown={onKeyDown}
       />
-      <span className="pt-[21px]">
+      <span className="pt-6">
         <Button onClick={() => type(String(line.coverable))}>All {line.coverable}</Button>
       </span>
     </div>

@@ -57,7 +57,7 @@ function UploadState({ upload }: { upload: Upload }) {
   if (refusal) {
     return (
       <p role="alert" className="flex items-start gap-2 [overflow-wrap:anywhere]">
-        <VerdictMark verdict="does_not_meet" size={14} className="mt-[3px] flex-none" />
+        <VerdictMark verdict="does_not_meet" size={14} className="mt-[3px] flex-none text-held-ink" />
         <span>{refusal.message}</span>
       </p>
     );
@@ -82,7 +82,7 @@ function UploadState({ upload }: { upload: Upload }) {
       className="flex items-start gap-2 [overflow-wrap:anywhere]"
       role={state === 'arrived' ? 'status' : undefined}
     >
-      {state === 'arrived' && <VerdictMark verdict="meets" size={14} className="mt-[3px] flex-none" />}
+      {state === 'arrived' && <VerdictMark verdict="meets" size={14} className="mt-[3px] flex-none text-proved-ink" />}
       <span>
         <strong>{name}</strong> <span className="text-quiet">{words}</span>
         {state === 'arrived' && <span className="sr-only"> has arrived</span>}

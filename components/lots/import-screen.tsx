@@ -58,7 +58,7 @@ export function ImportScreen() {
           error={fault}
           hint="comma, semicolon or tab between the cells; at most 1,000 rows"
         />
-        <div className="pt-[21px] max-md:pt-0">
+        <div className="pt-6 max-md:pt-0">
           <Button onClick={saveTemplate}>Save an empty file to fill in</Button>
         </div>
       </div>

@@ -45,7 +45,7 @@ export function PromiseStep({ batch, clock }: { batch: PortalBatch; clock: Clock
           <Button
             type="submit"
             size="big"
-            className="mt-[1.3125rem]"
+            className="mt-6"
             busy={promise.sending}
             busyLabel="Sending"
             notNow={day === '' && 'Choose a day first.'}

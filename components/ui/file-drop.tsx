@@ -55,7 +55,7 @@ export function FileDrop({
   };
 
   return (
-    <div className={`flex min-w-0 flex-col gap-[3px] ${className}`}>
+    <div className={`flex min-w-0 flex-col gap-1.5 ${className}`}>
       <label htmlFor={id} className="font-cond text-word leading-[1.125rem]">
         {label}
       </label>
