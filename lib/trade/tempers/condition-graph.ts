@@ -35,12 +35,22 @@ export type DerivedCaution = 'counts_as_reheat' | 'loses_mill_cold_work';
 
 export const isSameState = (a: Temper, b: Temper): boolean => a === b || (isAsQuenched(a) && isAsQuenched(b));
 
+type Paths = ReadonlyMap<Temper, readonly ConditionStep[]>;
+
+/** A batch asks the same of the same tables for hundreds of lines. */
+const KNOWN = new WeakMap<ConditionRules, Map<string, Paths>>();
+
 /** Conditions that can be made, each with the fewest steps that lead to it; the condition itself has none. */
-export function pathsFrom(
-  rules: ConditionRules,
-  material: ConditionMaterial,
-  from: Temper,
-): ReadonlyMap<Temper, readonly ConditionStep[]> {
+export function pathsFrom(rules: ConditionRules, material: ConditionMaterial, from: Temper): Paths {
+  const known = KNOWN.get(rules) ?? new Map<string, Paths>();
+  KNOWN.set(rules, known);
+  const question = `${material.alloy} ${material.form} ${material.clad} ${from}`;
+  const paths = known.get(question) ?? findPaths(rules, material, from);
+  known.set(question, paths);
+  return paths;
+}
+
+function findPaths(rules: ConditionRules, material: ConditionMaterial, from: Temper): Paths {
   const paths = new Map<Temper, readonly ConditionStep[]>([[from, []]]);
   // A map can be added to while it is walked: what is found is looked at in its turn, nearest first.
   for (const [condition, path] of paths)
