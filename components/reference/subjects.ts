@@ -1,6 +1,7 @@
 /** The calculators of the bench, by the last part of their address. */
 export const SUBJECTS = {
   fit: 'Fit in a tank or furnace',
+  soak: 'Soak and quench delay',
 } as const;
 
 export type Subject = keyof typeof SUBJECTS;

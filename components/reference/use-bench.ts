@@ -16,6 +16,8 @@ export interface Bench<Name extends string> {
   typed: Readonly<Record<Name, string>>;
   /** What a field needs to be bound to its name: value, what changes it, its unit. */
   field: (name: Name) => { value: string; unit: string | undefined; onChange: (event: Changed) => void };
+  /** The same for a field that is chosen from a list. */
+  choice: (name: Name) => { value: string; onChange: (event: Changed) => void };
   /** The measure in mm or °C, a number as it is; null where it cannot be read. */
   read: (name: Name) => number | null;
   /** A length in mm or a temperature in °C, as it is written in the units chosen, with its unit. */
@@ -50,6 +52,10 @@ export function useBench<Fields extends BenchFields>(
 
   const read = (name: Name) => readBench(typed[name], kindOf(name), units);
   const set = (values: Partial<Record<Name, string>>) => setTyped((was) => ({ ...was, ...values }));
+  const change =
+    (name: Name) =>
+    ({ currentTarget }: Changed) =>
+      set({ [name]: currentTarget.value } as Partial<Record<Name, string>>);
   return {
     units,
     typed,
@@ -66,8 +72,9 @@ export function useBench<Fields extends BenchFields>(
     field: (name) => ({
       value: typed[name],
       unit: unitWord(kindOf(name), units),
-      onChange: ({ currentTarget }) => set({ [name]: currentTarget.value } as Partial<Record<Name, string>>),
+      onChange: change(name),
     }),
+    choice: (name) => ({ value: typed[name], onChange: change(name) }),
     says: (value, kind) => `${benchText(value, kind, units)} ${unitWord(kind, units) ?? ''}`,
   };
 }
