@@ -82,7 +82,9 @@ function UploadState({ upload }: { upload: Upload }) {
       className="flex items-start gap-2 [overflow-wrap:anywhere]"
       role={state === 'arrived' ? 'status' : undefined}
     >
-      {state === 'arrived' && <VerdictMark verdict="meets" size={14} className="mt-[3px] flex-none text-proved-ink" />}
+      {state === 'arrived' && (
+        <VerdictMark verdict="meets" size={14} className="mt-[3px] flex-none text-proved-ink" />
+      )}
       <span>
         <strong>{name}</strong> <span className="text-quiet">{words}</span>
         {state === 'arrived' && <span className="sr-only"> has arrived</span>}
