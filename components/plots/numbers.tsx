@@ -15,9 +15,9 @@ export function Numbers({ label, heads, rows }: NumbersProps) {
         <table className="mt-1.5">
           <thead>
             <tr>
-              {heads.map((head) => (
+              {heads.map((head, column) => (
                 <th
-                  key={head}
+                  key={column}
                   scope="col"
                   className="pr-6 pb-1 text-left font-cond text-caption font-normal text-quiet"
                 >

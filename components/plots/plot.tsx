@@ -1,4 +1,6 @@
-import { placeOf, type Axis, type Place } from './scale';
+import { placeOf, type Axis } from './scale';
+
+type Place = (value: number) => number;
 
 export interface Series {
   says: string;
@@ -20,7 +22,6 @@ interface PlotProps {
   between?: readonly [number, number];
   /** What was asked for: a line at x with a ring on each value. */
   mark?: { x: number; values: readonly number[]; says?: readonly string[] } | undefined;
-  width?: number;
   height?: number;
 }
 
@@ -37,19 +38,31 @@ const LOOKS: Record<Series['look'], { stroke: string; width: number; dash?: stri
   third: { stroke: 'var(--quiet)', width: 1.5, dash: '2 3' },
 };
 
+const DESK_WIDTH = 720;
+/** On a phone the same plot is drawn narrower, not shrunk: its words keep their size. */
+const PHONE_WIDTH = 358;
+
 /** Lines over a labelled ground. Every line is named in words; the numbers stand beneath as a table. */
 export function Plot(props: PlotProps) {
-  const { says, x, y, series, band, between, mark, width = 720, height = 300 } = props;
-  const across = placeOf(x, [LEFT, width - RIGHT]);
-  const up = placeOf(y, [height - BOTTOM, TOP]);
+  return (
+    <>
+      <Drawn {...props} width={DESK_WIDTH} className="max-sm:hidden" />
+      <Drawn {...props} width={PHONE_WIDTH} className="sm:hidden" />
+    </>
+  );
+}
+
+function Drawn(props: PlotProps & { width: number; className: string }) {
+  const { says, x, y, series, band, between, mark, width, className, height = 300 } = props;
+  const across = rounded(placeOf(x, [LEFT, width - RIGHT]));
+  const up = rounded(placeOf(y, [height - BOTTOM, TOP]));
   const foot = height - BOTTOM;
   return (
     <svg
       viewBox={`0 0 ${width} ${height}`}
       role="img"
       aria-label={says}
-      className="h-auto w-full max-w-[720px]"
-      style={{ aspectRatio: `${width} / ${height}` }}
+      className={`h-auto w-full max-w-[720px] ${className}`}
     >
       {band && <Band band={band} across={across} foot={foot} />}
       {between && <Between pair={[series[between[0]], series[between[1]]]} across={across} up={up} />}
@@ -174,8 +187,12 @@ function Mark({ mark, across, up, foot }: Ground & { mark: NonNullable<PlotProps
 }
 
 const pathOf = (points: Series['points'], across: Place, up: Place): string =>
-  points.map(([x, y], at) => `${at === 0 ? 'M' : 'L'}${round(across(x))} ${round(up(y))}`).join('');
-const round = (value: number): number => Math.round(value * 10) / 10;
+  points.map(([x, y], at) => `${at === 0 ? 'M' : 'L'}${across(x)} ${up(y)}`).join('');
+/** Server and browser differ in the last digit of a logarithm, and must draw the same. */
+const rounded =
+  (place: Place): Place =>
+  (value) =>
+    Math.round(place(value) * 10) / 10;
 
 /** A table that jumps is drawn as steps: each row holds from where the last one ended. */
 export const stepsOf = (

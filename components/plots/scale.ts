@@ -10,11 +10,9 @@ export interface Axis {
   by?: 'difference' | 'ratio';
 }
 
-export type Place = ScaleContinuousNumeric<number, number>;
-
 /** From a value to its place in the picture. */
-export function placeOf(axis: Axis, [start, end]: readonly [number, number]): Place {
-  const scale: Place = axis.by === 'ratio' ? scaleLog() : scaleLinear();
+export function placeOf(axis: Axis, [start, end]: readonly [number, number]): (value: number) => number {
+  const scale: ScaleContinuousNumeric<number, number> = axis.by === 'ratio' ? scaleLog() : scaleLinear();
   return scale.domain([axis.from, axis.to]).range([start, end]);
 }
 

@@ -7,7 +7,7 @@ export type BenchUnits = 'inch' | 'metric';
 
 const WORDS = { inch: { length: 'in', temperature: '°F' }, metric: { length: 'mm', temperature: '°C' } };
 /** How exactly a measure is written again after its unit was changed. */
-const PLACES = { inch: { length: 4, temperature: 0 }, metric: { length: 3, temperature: 0 } };
+const PLACES = { inch: { length: 3, temperature: 0 }, metric: { length: 3, temperature: 0 } };
 
 export const unitWord = (kind: BenchKind, units: BenchUnits): string | undefined =>
   kind === 'length' || kind === 'temperature' ? WORDS[units][kind] : undefined;

@@ -27,7 +27,7 @@ export function CalculatorFrame({ title, note, units, onUnits, children }: Calcu
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2 pb-4 print:hidden">
         <span className="text-second text-quiet">Units</span>
         <SegmentButtons label="Units" value={units} options={UNITS} onChange={onUnits} />
-        <PrintButton says="Print this page" />
+        <PrintButton says="Print this page" look="outlined" />
       </div>
       <Section title={title} note={note}>
         {children}

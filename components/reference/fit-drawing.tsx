@@ -19,8 +19,9 @@ export function FitDrawing({ blank, tank, freeMm, lies, says }: FitDrawingProps)
   const angles = lies === 'diagonally' ? fittingAngles(blank, inside) : null;
   const degrees = angles ? (angles.from + angles.to) / 2 : 0;
   const needed = neededAt(blank, radians(degrees));
-  const scale = (WIDTH - 2 * MARGIN) / Math.max(a, needed.along);
-  const height = Math.max(b, needed.across) * scale + 2 * MARGIN;
+  // Rounded, because server and browser differ in the last digit of a cosine and must draw the same.
+  const scale = round((WIDTH - 2 * MARGIN) / Math.max(a, needed.along), 1e6);
+  const height = round(Math.max(b, needed.across) * scale + 2 * MARGIN, 10);
   const [left, top] = [(WIDTH - a * scale) / 2, (height - b * scale) / 2];
   const fits = lies !== null;
   return (
@@ -48,7 +49,7 @@ export function FitDrawing({ blank, tank, freeMm, lies, says }: FitDrawingProps)
         stroke="var(--stocked-ink)"
         strokeDasharray="4 3"
       />
-      <g transform={`translate(${WIDTH / 2} ${height / 2}) rotate(${-degrees})`}>
+      <g transform={`translate(${WIDTH / 2} ${height / 2}) rotate(${-round(degrees, 100)})`}>
         <rect
           x={(-p * scale) / 2}
           y={(-q * scale) / 2}
@@ -75,7 +76,7 @@ export function FitDrawing({ blank, tank, freeMm, lies, says }: FitDrawingProps)
         {says(b, 'length')}
       </text>
       {angles && (
-        <text x={left + 8} y={top + b * scale - 8} fill="var(--ink)" className="font-cond text-source">
+        <text x={left + 12} y={top + 22} fill="var(--ink)" className="font-cond text-source">
           at {degrees.toFixed(1)}°, fits from {angles.from.toFixed(1)}° to {angles.to.toFixed(1)}°
         </text>
       )}
@@ -93,3 +94,5 @@ function Dimension({ from, to, y, says }: { from: number; to: number; y: number;
     </g>
   );
 }
+
+const round = (value: number, parts: number): number => Math.round(value * parts) / parts;

@@ -13,7 +13,7 @@ export function SourceLine({ source, readFrom }: { source: Source; readFrom?: Ta
   return (
     <p className="pt-2 text-source text-quiet">
       {source.document}; {HOW[source.confidence]}; {source.certainty} trust.
-      {readFrom && ` Edition: ${readFrom.edition}.`}
+      {readFrom && !source.document.includes(readFrom.edition) && ` Table: ${readFrom.edition}.`}
       {source.address !== undefined && ` Seen at ${source.address}.`}
     </p>
   );
