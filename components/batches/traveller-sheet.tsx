@@ -1,6 +1,7 @@
 import type { TravellerSays } from '@/lib/batches/paper-contract';
 import { dayWords } from '@/lib/day-words';
 import { limitWords } from '@/lib/parts/limit-words';
+import { linesWords } from '@/lib/parts/lines-words';
 import { PROCESS_WORDS } from '@/lib/trade/process';
 
 // Paper outlives its year, so it names it: seen from here no day is of this year.
@@ -13,12 +14,12 @@ export function TravellerSheet({ says, small = false }: { says: TravellerSays; s
   const version = says.documentVersion === 0 ? 'draft' : `version ${says.documentVersion}`;
   return (
     <div
-      className={`lw-sheet border border-rule bg-white text-[#1e2326] ${small ? 'p-3 text-[9px] leading-3' : 'mx-auto max-w-[816px] p-6 text-row md:p-9'}`}
+      className={`lw-sheet border border-rule bg-white text-[#1e2326] ${small ? 'p-3 text-[9px] leading-3' : 'mx-auto max-w-[816px] p-4 text-row md:p-9'}`}
     >
-      <div className="flex items-center border-heavy border-current px-3 py-1">
+      <div className="flex flex-wrap items-center border-heavy border-current px-3 py-1">
         <span className={`rounded-full border-heavy border-current ${small ? 'size-2.5' : 'size-6'}`} />
         <span
-          className={`pl-3 font-mono font-semibold ${small ? 'text-[15px]' : 'text-[2.2rem] leading-10'}`}
+          className={`pl-3 font-mono font-semibold whitespace-nowrap ${small ? 'text-[15px]' : 'text-[1.7rem] leading-10 md:text-[2.2rem]'}`}
         >
           {says.number}
         </span>
@@ -42,9 +43,8 @@ export function TravellerSheet({ says, small = false }: { says: TravellerSays; s
         <SheetList
           title="Must be proved"
           small={small}
-          items={says.requirements.map(
-            (one) =>
-              `${one.characteristic} ${limitWords(one)}${one.lines.length > 0 ? `, ${one.lines.length === 1 ? 'line' : 'lines'} ${one.lines.join(', ')}` : ''}`,
+          items={says.requirements.map((one) =>
+            [`${one.characteristic} ${limitWords(one)}`, linesWords(one.lines)].filter(Boolean).join(', '),
           )}
         />
         <SheetList
@@ -66,13 +66,21 @@ export function TravellerSheet({ says, small = false }: { says: TravellerSays; s
   );
 }
 
+/** Where a sheet is too narrow for columns, each line is a block of its own. */
+const ROW =
+  'max-md:flex max-md:flex-wrap max-md:gap-x-4 max-md:border-b max-md:border-current/20 max-md:py-2';
+
 function SheetLines({ lines, small }: { lines: TravellerSays['lines']; small: boolean }) {
-  const cell = small ? 'py-px pr-1.5' : 'border-b border-current/20 py-1.5 pr-3';
+  const cell = small
+    ? 'py-px pr-1.5'
+    : 'py-1.5 pr-3 max-md:block max-md:p-0 max-md:empty:hidden md:border-b md:border-current/20';
   return (
     <div className="overflow-x-auto">
-      <table className={`w-full text-left ${small ? 'mt-1.5 text-[8.5px] leading-[10px]' : 'mt-4'}`}>
+      <table
+        className={`w-full text-left ${small ? 'mt-1.5 text-[8.5px] leading-[10px]' : 'mt-4 max-md:block max-md:border-t max-md:border-current'}`}
+      >
         {!small && (
-          <thead>
+          <thead className="max-md:sr-only">
             <tr className="border-b border-current font-cond text-caption">
               {['', 'Lot', 'Part and revision', '', 'Material, heat', 'Thickness', 'From, to', 'Pieces'].map(
                 (name, at) => (
@@ -84,23 +92,28 @@ function SheetLines({ lines, small }: { lines: TravellerSays['lines']; small: bo
             </tr>
           </thead>
         )}
-        <tbody>
+        <tbody className={small ? '' : 'max-md:block'}>
           {lines.map((line) => (
-            <tr key={line.lineNo}>
-              <td className={`${cell} font-mono`}>{line.lineNo}</td>
-              <td className={`${cell} font-mono`}>{line.lotNumber}</td>
-              <td className={`${cell} font-mono`}>{`${line.partNumber} ${line.partRevision}`}</td>
+            <tr key={line.lineNo} className={small ? '' : ROW}>
+              <td className={`${cell} font-mono whitespace-nowrap`}>{line.lineNo}</td>
+              <td className={`${cell} font-mono whitespace-nowrap`}>{line.lotNumber}</td>
+              <td
+                className={`${cell} font-mono [overflow-wrap:anywhere]`}
+              >{`${line.partNumber} ${line.partRevision}`}</td>
               <td className={cell}>{line.partName}</td>
               {!small && (
                 <td className={cell}>
                   {line.material} <span className="font-mono">{line.heat}</span>
                 </td>
               )}
-              <td className={`${cell} font-mono`}>{line.thickness}</td>
-              <td className={`${cell} font-mono`}>
+              <td className={`${cell} font-mono whitespace-nowrap`}>{line.thickness}</td>
+              <td className={`${cell} font-mono whitespace-nowrap`}>
                 {[line.conditionBefore, line.targetCondition].filter(Boolean).join(small ? '-' : ' to ')}
               </td>
-              <td className={`${cell} text-right font-mono`}>{line.pieces}</td>
+              <td className={`${cell} text-right font-mono whitespace-nowrap`}>
+                {line.pieces}
+                {!small && <span className="md:sr-only"> pc</span>}
+              </td>
             </tr>
           ))}
         </tbody>

@@ -3,12 +3,13 @@ import { Document, Text, View } from '@react-pdf/renderer';
 import { expectedPrice } from '@/lib/batches/expected-price';
 import { amountText } from '@/lib/money';
 import { limitWords } from '@/lib/parts/limit-words';
+import { linesWords } from '@/lib/parts/lines-words';
 import type { OrderContent } from '@/lib/travellers/content';
 
 import { COND, MONO } from './fonts';
 import { INK, QUIET, RULE, type } from './look';
 import { Asked, Cells, Heading, Paper } from './paper-parts';
-import { conditionWords, linesWords, paperDay, paperMoment, workAsked } from './paper-words';
+import { conditionWords, paperDay, paperMoment, workAsked } from './paper-words';
 
 /** The purchase order of a batch: what is asked, and what is paid for it. */
 export function OrderDocument({ content, hash }: { content: OrderContent; hash: string }) {

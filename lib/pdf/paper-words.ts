@@ -34,12 +34,6 @@ export function conditionWords({
   return targetCondition ?? conditionBefore ?? '';
 }
 
-/** `lines 1, 3` */
-export function linesWords(lines: readonly number[]): string {
-  if (lines.length === 0) return '';
-  return `${lines.length === 1 ? 'line' : 'lines'} ${lines.join(', ')}`;
-}
-
 /** `41 pieces`, `1 line` */
 export const counted = (count: number, one: string, many = `${one}s`): string =>
   `${count.toLocaleString('en-US')} ${count === 1 ? one : many}`;

@@ -1,12 +1,13 @@
 import { Document, Text, View } from '@react-pdf/renderer';
 
 import { limitWords } from '@/lib/parts/limit-words';
+import { linesWords } from '@/lib/parts/lines-words';
 import type { TravellerContent } from '@/lib/travellers/content';
 
 import { COND, MONO } from './fonts';
 import { INK, type } from './look';
 import { Asked, Bulleted, Cells, contentWidth, Hand, Heading, Paper, TagHead } from './paper-parts';
-import { counted, linesWords, paperDay, paperMoment, workAsked } from './paper-words';
+import { counted, paperDay, paperMoment, workAsked } from './paper-words';
 import { QrCode } from './qr-code';
 import { TravellerLines } from './traveller-lines';
 
