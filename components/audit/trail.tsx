@@ -69,10 +69,10 @@ export function Trail({ asked, zone, ofOneThing = false }: TrailProps) {
 function TrailRow({ entry, zone, ofOneThing }: { entry: AuditEntry; zone: string; ofOneThing: boolean }) {
   return (
     <Row>
-      <Cell head="When">
+      <Cell>
         <Moment at={new Date(entry.at)} clock={{ zone, now: new Date() }} />
       </Cell>
-      <Cell head="Who">
+      <Cell>
         {entry.actorKind === 'job' ? 'Lotwright' : entry.actorName}
         <span className="text-quiet">{actorNote(entry)}</span>
       </Cell>
@@ -81,9 +81,7 @@ function TrailRow({ entry, zone, ofOneThing }: { entry: AuditEntry; zone: string
           <Thing entry={entry} />
         </Cell>
       )}
-      <Cell head="What" strong>
-        {actionWords(entry.action)}
-      </Cell>
+      <Cell strong>{actionWords(entry.action)}</Cell>
       <Cell>
         <Changes entry={entry} />
       </Cell>

@@ -42,13 +42,14 @@ export interface Change {
   after: string | null;
 }
 
-/** The fields that are different, in words; with one side only, all of that side. */
+/** The fields that are different, in words; with one side only, all of that side. An id alone tells a reader nothing. */
 export function changesBetween(
   before: Record<string, unknown> | null,
   after: Record<string, unknown> | null,
 ): Change[] {
   const names = [...new Set([...Object.keys(before ?? {}), ...Object.keys(after ?? {})])];
   return names
+    .filter((name) => !isId(before?.[name]) && !isId(after?.[name]))
     .map((name) => ({
       field: fieldWords(name),
       before: wordsOf(name, before?.[name]),
@@ -80,11 +81,10 @@ function valueWords(value: unknown): string | null {
 }
 
 const ID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/;
+const isId = (value: unknown): boolean => typeof value === 'string' && ID.test(value);
 
 /** What is nothing or an id inside a thing tells a reader nothing; the entry itself keeps it. */
 function objectWords(value: object): string {
-  const told = Object.entries(value).filter(
-    ([, inner]) => !(typeof inner === 'string' && ID.test(inner)) && valueWords(inner) !== null,
-  );
+  const told = Object.entries(value).filter(([, inner]) => !isId(inner) && valueWords(inner) !== null);
   return told.map(([name, inner]) => `${fieldWords(name)} ${valueWords(inner) ?? ''}`).join(', ');
 }
