@@ -14,11 +14,11 @@ export function BatchMark({ wait }: { wait: Pick<Wait, 'id' | 'number' | 'stage'
   return (
     <Link
       href={`/batches/${wait.id}`}
-      className={`inline-flex items-center gap-1 whitespace-nowrap no-underline hover:underline ${STAGE_TONES[wait.stage]}`}
+      className={`inline-flex items-center gap-1 whitespace-nowrap text-(--ti) no-underline hover:underline ${STAGE_TONES[wait.stage]}`}
       aria-label={`${wait.number}, ${STAGE_WORDS[wait.stage]}`}
     >
       <StageMark stage={wait.stage} size={12} />
-      <span className="num font-semibold text-(--ti)">{wait.number.replace(/^B-/, '')}</span>
+      <span className="num font-semibold">{wait.number.replace(/^B-/, '')}</span>
     </Link>
   );
 }

@@ -132,7 +132,7 @@ function Asked({ says, requirements }: { says: string; requirements: readonly Re
       {requirements.map((one) => (
         <Row key={one.id}>
           <Cell className="w-2/5">{one.characteristic}</Cell>
-          <Cell code strong className="w-2/5">
+          <Cell code strong className="w-2/5 [overflow-wrap:anywhere] whitespace-normal!">
             {limitWords(one)}
           </Cell>
           <Cell quiet>{one.sourceText || one.source}</Cell>

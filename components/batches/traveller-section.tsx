@@ -58,6 +58,7 @@ function Papers({ batchId }: { batchId: string }) {
   );
   return (
     <Section title="Papers" note="every version stays">
+      {data?.documents.length === 0 && <p className="py-1.5 text-second text-quiet">None is made yet.</p>}
       <ul aria-label="Papers">
         {(data?.documents ?? []).map((document) => (
           <Paper key={document.id} document={document} clock={clock} />

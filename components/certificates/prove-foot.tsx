@@ -12,7 +12,7 @@ export function ProveFoot({ proving, onSign }: { proving: Proving; onSign: () =>
   return (
     <div className="sticky bottom-0 z-10 border-t-heavy border-ink bg-paper px-6 py-3 max-md:static max-md:px-4">
       <div className="flex flex-wrap items-start justify-between gap-x-6 gap-y-2">
-        <div className="min-w-0 flex-1">
+        <div className="min-w-[min(18rem,100%)] flex-1">
           <strong className="font-cond text-section">
             <span className="num">{decided}</span> of <span className="num">{rows.length}</span> decided.{' '}
             {left > 0 && proving.canEdit && (

@@ -111,9 +111,15 @@ function What({ data }: { data: NonconformanceDetail }) {
       )}
       {data.certificate && (
         <p className="text-second">
-          Found on certificate{' '}
-          <Link href={`/certificates/${data.certificate.id}`} className="num">
-            {data.certificate.number ?? 'without number yet'}
+          Found on{' '}
+          <Link href={`/certificates/${data.certificate.id}`}>
+            {data.certificate.number === null ? (
+              'a certificate without number yet'
+            ) : (
+              <>
+                certificate <span className="num">{data.certificate.number}</span>
+              </>
+            )}
           </Link>
           .
         </p>

@@ -98,6 +98,7 @@ function Counting({ batchId }: { batchId: string }) {
     router.push(`/batches/${batch.id}`);
   });
   const { errors, isSubmitting } = form.formState;
+  const isEmpty = Object.values(sums).every((sum) => sum === 0);
   return (
     <FormProvider {...form}>
       <form noValidate onSubmit={submit} aria-label={`Count of ${batch.number}`}>
@@ -124,11 +125,12 @@ function Counting({ batchId }: { batchId: string }) {
             type="submit"
             busy={isSubmitting}
             busyLabel="Counting in"
+            notNow={isEmpty && 'Count what is here first.'}
             className="max-md:w-full"
           >
-            Count in {sums.good + sums.damaged}
+            {isEmpty ? 'Count in' : `Count in ${sums.good + sums.damaged}`}
           </Button>
-          <p className="text-second" aria-live="polite">
+          <p className={isEmpty ? 'sr-only' : 'text-second'} aria-live="polite">
             <strong className="num">{sums.good}</strong> good,{' '}
             <strong className={`num ${sums.damaged > 0 ? 'text-held-ink' : ''}`}>{sums.damaged}</strong>{' '}
             damaged, <strong className={`num ${sums.short > 0 ? 'text-held-ink' : ''}`}>{sums.short}</strong>{' '}

@@ -51,11 +51,11 @@ export function LineCounters({ line, at }: { line: ReceivingLine; at: number }) 
       ) : (
         line.away > 0 && (
           <Button size="small" onClick={allGood}>
-            All {line.away} are here and good
+            {line.away === 1 ? 'It is here and good' : `All ${line.away} are here and good`}
           </Button>
         )
       )}
-      <div className="grid grid-cols-2 gap-x-4 gap-y-3 pt-3 md:grid-cols-4">
+      <div className="grid max-w-[59rem] grid-cols-2 gap-x-4 gap-y-3 pt-3 md:grid-cols-4">
         {COUNTS.filter(({ name }) => !line.serialised || name === 'short' || name === 'over').map(
           ({ name, label }) => (
             <PieceCounter

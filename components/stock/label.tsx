@@ -37,7 +37,9 @@ export function Label({ release, shop, code, clock }: LabelProps) {
         <div className="lw-label-part">
           <div className="min-w-0">
             <div className="lw-label-part-number">
-              {release.partNumber} <span>rev</span> {release.partRevision}
+              {release.partNumber}
+              <span> rev </span>
+              {release.partRevision}
             </div>
             <div className="lw-label-name">{release.partName}</div>
           </div>
@@ -116,7 +118,7 @@ function Fact({ caption, says }: { caption: string; says: string }) {
   );
 }
 
-/** `proved 20 Apr 2026, cert. 26-04177-1, batch B-0404. Scan for the dossier.` A label outlives the year. */
+/** `proved 20 Apr 2026, cert. 26-04177-1, batch B-0404`. A label outlives the year. */
 function footWords(release: Release, clock: Clock): string {
   const { provedOn, certificates, batchNumber, serials } = release;
   const parts = [
@@ -127,7 +129,7 @@ function footWords(release: Release, clock: Clock): string {
       : null,
     `batch ${batchNumber}`,
   ];
-  return `${parts.filter(Boolean).join(', ')}. Scan for the dossier.`;
+  return parts.filter(Boolean).join(', ');
 }
 
 const MOST_SERIALS = 6;
