@@ -48,7 +48,7 @@ export function ChecksSection({ batchId }: { batchId: string }) {
         </CheckList>
       )}
       {data.met.length > 0 && (
-        <MetChecks count={data.met.length}>
+        <MetChecks count={data.met.length} alone={data.findings.length === 0}>
           <ul className="text-quiet">
             {data.met.map((met) => (
               <li key={met}>{met}</li>

@@ -31,13 +31,21 @@ export function CheckList({ label, children }: { label: string; children: ReactN
   return <ul aria-label={label}>{children}</ul>;
 }
 
+interface MetChecksProps {
+  count: number;
+  /** Nothing was found beside them. */
+  alone?: boolean;
+  children: ReactNode;
+}
+
 /** All that is met, in one line that opens. */
-export function MetChecks({ count, children }: { count: number; children: ReactNode }) {
+export function MetChecks({ count, alone = false, children }: MetChecksProps) {
   return (
     <details className="py-2 pl-[30px] text-second">
       <summary className="flex items-center gap-1.5 font-cond text-word text-proved-ink">
         <VerdictMark verdict="meets" size={13} />
-        {count} other {count === 1 ? 'check' : 'checks'} met
+        {count} {alone ? '' : 'other '}
+        {count === 1 ? 'check' : 'checks'} met
         <span className="lw-word-button text-ink">Show</span>
       </summary>
       <div className="pt-1">{children}</div>
