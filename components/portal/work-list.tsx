@@ -23,14 +23,17 @@ interface WorkListProps {
   now: string;
 }
 
+/** On a tablet ten columns leave none of them room; on a phone a row is a block and has it. */
+const ON_WIDE = 'md:max-lg:hidden';
+
 const COLUMNS = [
   { says: 'Batch' },
   { says: 'Shop' },
   { says: 'Pieces', right: true },
   { says: 'Parts' },
-  { says: 'Material' },
+  { says: 'Material', className: ON_WIDE },
   { says: 'Asked' },
-  { says: 'Thickness' },
+  { says: 'Thickness', className: ON_WIDE },
   { says: 'Promised' },
   { says: 'Open', hidden: true },
   { says: 'Go', hidden: true },
@@ -197,22 +200,24 @@ function WorkRow({ row, clock, open }: { row: PortalRow; clock: Clock; open: boo
       <Cell>
         <BatchTag size="row" stage={row.stage} number={row.number} href={href} />
       </Cell>
-      <Cell strong className="font-cond [overflow-wrap:anywhere]">
+      <Cell strong className="font-cond break-words lg:whitespace-nowrap">
         {row.shop}
       </Cell>
       <Cell figure strong head="Pieces">
         {row.pieces.toLocaleString('en-US')}
       </Cell>
-      <Cell className="[overflow-wrap:anywhere]">{someOf(row.parts)}</Cell>
-      <Cell>{someOf(row.materials)}</Cell>
+      <Cell className="break-words">{someOf(row.parts, '; ')}</Cell>
+      <Cell className={ON_WIDE}>{someOf(row.materials)}</Cell>
       <Cell className="font-cond">{row.asked}</Cell>
-      <Cell code head="Thickness">
+      <Cell code head="Thickness" className={ON_WIDE}>
         {someOf(row.thicknesses)}
       </Cell>
-      <Cell>
+      <Cell className="whitespace-nowrap">
         <Promised row={row} clock={clock} open={open} />
       </Cell>
-      <Cell quiet>{open && todo.says}</Cell>
+      <Cell quiet className="xl:whitespace-nowrap">
+        {open && todo.says}
+      </Cell>
       <Cell right>
         {open && (
           <Link
@@ -248,5 +253,5 @@ function Promised({ row, clock, open }: { row: PortalRow; clock: Clock; open: bo
   );
 }
 
-const someOf = (words: readonly string[]): string =>
-  words.length <= 2 ? words.join(', ') : `${words.slice(0, 2).join(', ')} and ${words.length - 2} more`;
+const someOf = (words: readonly string[], between = ', '): string =>
+  words.slice(0, 2).join(between) + (words.length > 2 ? ` and ${words.length - 2} more` : '');

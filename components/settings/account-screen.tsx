@@ -8,7 +8,7 @@ import { Checkbox, RadioGroup } from '@/components/ui/choice';
 import { showMessage } from '@/components/ui/message';
 import { PageHead } from '@/components/ui/page-head';
 import { Section } from '@/components/ui/section';
-import { useMe } from '@/components/session/use-me';
+import { useMay, useMe } from '@/components/session/use-me';
 import {
   endMySessions,
   getAccount,
@@ -41,16 +41,14 @@ export function AccountScreen(props: AccountSectionsProps) {
 /** What belongs to the person, whichever organisation they work for just now. */
 export function AccountSections({ signIn, page }: AccountSectionsProps) {
   const { data: account } = useRead(getAccount, {});
+  const signs = useMay('certificate.prove');
   return (
     <div className="flex max-w-[40rem] flex-col gap-7">
       <Section title="Name">
         <NameForm name={account.name} email={account.email} />
       </Section>
       <Choices account={account} />
-      <Section
-        title="Password"
-        note={account.hasPassword ? 'also what you sign certificates with' : 'you sign in by mailed link'}
-      >
+      <Section title="Password" note={passwordNote(account, signs)}>
         {account.hasPassword ? (
           <PasswordForm signIn={signIn} page={page} />
         ) : (
@@ -61,6 +59,11 @@ export function AccountSections({ signIn, page }: AccountSectionsProps) {
       {account.organisations.length > 1 && <Organisations account={account} />}
     </div>
   );
+}
+
+function passwordNote({ hasPassword }: Account, signs: boolean): string | undefined {
+  if (!hasPassword) return 'you sign in by mailed link';
+  return signs ? 'also what you sign certificates with' : undefined;
 }
 
 function Choices({ account }: { account: Account }) {
@@ -120,11 +123,12 @@ function FirstPassword({ email }: { email: string }) {
 function Sessions() {
   const router = useRouter();
   const write = useWrite(endMySessions);
+  const hasTokens = useMay('token.manage');
   return (
     <Section title="Sessions">
       <p className="pt-1 text-quiet">
-        A lost telephone, a shared machine: this ends every session of yours, here too. Tokens for programs
-        stay.
+        A lost telephone, a shared machine: this ends every session of yours, here too.
+        {hasTokens && ' Tokens for programs stay.'}
       </p>
       <div className="pt-2.5">
         <Button

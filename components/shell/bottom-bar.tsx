@@ -3,7 +3,7 @@
 import Link from 'next/link';
 import { usePathname } from 'next/navigation';
 import type { ReactNode } from 'react';
-import { isInSection, type SectionLink } from './sections';
+import { sectionOf, type SectionLink } from './sections';
 
 interface BottomBarProps {
   sections: readonly SectionLink[];
@@ -25,9 +25,9 @@ const CELL =
 /** On a phone: four things within reach of a thumb. */
 export function BottomBar(props: BottomBarProps) {
   const { sections, forMe, forMeHref = '/#for-me', scan, personPanel, organisation, person } = props;
-  const path = usePathname();
+  const open = sectionOf(usePathname(), sections);
   const home = sections[0];
-  const atHome = home ? isInSection(path, home) : false;
+  const atHome = home !== undefined && home === open;
   return (
     <nav
       aria-label="Main"
@@ -63,7 +63,7 @@ export function BottomBar(props: BottomBarProps) {
               key={section.href}
               href={section.href}
               onClick={(event) => event.currentTarget.closest<HTMLElement>('[popover]')?.hidePopover()}
-              aria-current={isInSection(path, section) ? 'page' : undefined}
+              aria-current={section === open ? 'page' : undefined}
               className="flex min-h-12 items-center gap-2 border-b border-rule font-cond text-sub no-underline aria-[current]:border-ink"
             >
               {section.says}

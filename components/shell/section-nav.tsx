@@ -2,18 +2,18 @@
 
 import Link from 'next/link';
 import { usePathname } from 'next/navigation';
-import { isInSection, type SectionLink } from './sections';
+import { sectionOf, type SectionLink } from './sections';
 
 /** The sections as plain words; the one that is open stands on a bar. */
 export function SectionNav({ sections }: { sections: readonly SectionLink[] }) {
-  const path = usePathname();
+  const open = sectionOf(usePathname(), sections);
   return (
     <nav
       aria-label="Main"
       className="flex flex-1 gap-0.5 border-rule font-cond text-[0.9375rem] leading-none max-lg:order-last max-lg:w-full max-lg:flex-none max-lg:flex-wrap max-lg:border-t max-md:hidden lg:border-l lg:pl-2.5"
     >
       {sections.map((section) => {
-        const current = isInSection(path, section);
+        const current = section === open;
         return (
           <Link
             key={section.href}

@@ -44,8 +44,13 @@ export function shopSections(
   return roles.includes('admin') ? [...sections, SETTINGS] : sections;
 }
 
-/** The section a page belongs to: the longest address it begins with. */
-export function isInSection(path: string, { href, also = [] }: SectionLink): boolean {
-  if (href === '/') return path === '/';
-  return [href, ...also].some((start) => path === start || path.startsWith(`${start}/`));
+/** The section a page belongs to: the one with the longest address it begins with. */
+export function sectionOf(path: string, sections: readonly SectionLink[]): SectionLink | undefined {
+  const begins = (start: string) =>
+    start === '/' ? path === '/' : path === start || path.startsWith(`${start}/`);
+  const lengthIn = ({ href, also = [] }: SectionLink) =>
+    Math.max(0, ...[href, ...also].filter(begins).map((start) => start.length));
+  return sections
+    .filter((section) => lengthIn(section) > 0)
+    .sort((one, other) => lengthIn(other) - lengthIn(one))[0];
 }

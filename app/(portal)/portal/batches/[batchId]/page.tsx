@@ -35,9 +35,11 @@ export default async function PortalBatchPage({ params }: BatchPageProps) {
       kept="What you answer here is kept on this device and sent when it is back."
     >
       {actor.kind === 'person' && (
-        <a href="/portal" className="lw-word-button">
-          All work
-        </a>
+        <p className="pb-2">
+          <a href="/portal" className="lw-word-button">
+            All work
+          </a>
+        </p>
       )}
       <Prefetched
         queries={[ask(getPortalBatchEndpoint, { batchId }), ask(listPortalMessagesEndpoint, { batchId })]}
