@@ -12,24 +12,22 @@ export async function makePart(
 ) {
   const id = newId();
   const number = given.number ?? `P-${id.slice(-8)}`;
-  await ctx.tx
-    .insert(parts)
-    .values({
-      id,
-      shopId: shopOf(ctx),
-      number,
-      revision: 'A',
-      name: 'Rib clip',
-      alloy: '2024',
-      form: 'sheet',
-      clad: true,
-      thicknessMm: 1.016,
-      thicknessEntered: '0.040 in',
-      madeCondition: 'O',
-      endCondition: 'T42',
-      serialised: given.serialised ?? false,
-      createdAt: ctx.now,
-    });
+  await ctx.tx.insert(parts).values({
+    id,
+    shopId: shopOf(ctx),
+    number,
+    revision: 'A',
+    name: 'Rib clip',
+    alloy: '2024',
+    form: 'sheet',
+    clad: true,
+    thicknessMm: 1.016,
+    thicknessEntered: '0.040 in',
+    madeCondition: 'O',
+    endCondition: 'T42',
+    serialised: given.serialised ?? false,
+    createdAt: ctx.now,
+  });
   const steps = (given.processes ?? ['solution_heat_treat_and_age']).map((process, at) => ({
     id: newId(),
     shopId: shopOf(ctx),
@@ -45,27 +43,28 @@ export async function makePart(
   return { id, number, stepIds: steps.map((step) => step.id) };
 }
 
+interface GivenLot {
+  part?: Awaited<ReturnType<typeof makePart>>;
+  pieces?: number;
+  serials?: readonly string[];
+}
+
 /** A lot with all its pieces waiting for the first step of the part's route. */
-export async function makeLot(
-  ctx: Ctx,
-  given: { part?: Awaited<ReturnType<typeof makePart>>; pieces?: number; serials?: readonly string[] } = {},
-) {
+export async function makeLot(ctx: Ctx, given: GivenLot = {}) {
   const part = given.part ?? (await makePart(ctx, { serialised: given.serials !== undefined }));
   const id = newId();
   const count = given.serials?.length ?? given.pieces ?? 10;
   const [stepId = ''] = part.stepIds;
-  await ctx.tx
-    .insert(lots)
-    .values({
-      id,
-      shopId: shopOf(ctx),
-      number: `L-${id.slice(-8)}`,
-      partId: part.id,
-      heat: 'H-1',
-      madeOn: ctx.now,
-      serialised: given.serials !== undefined,
-      createdAt: ctx.now,
-    });
+  await ctx.tx.insert(lots).values({
+    id,
+    shopId: shopOf(ctx),
+    number: `L-${id.slice(-8)}`,
+    partId: part.id,
+    heat: 'H-1',
+    madeOn: ctx.now,
+    serialised: given.serials !== undefined,
+    createdAt: ctx.now,
+  });
   const named = (given.serials ?? []).map((serial) => ({
     id: newId(),
     shopId: shopOf(ctx),
@@ -82,4 +81,17 @@ export async function makeLot(
     ...(named.length > 0 ? { pieceIds: named.map((piece) => piece.id) } : {}),
   });
   return { id, part, stepId, pieces: count };
+}
+
+/** A lot of which all pieces lie in a place of the stores, as after the gate. */
+export async function makeStock(ctx: Ctx, { locationId, ...given }: GivenLot & { locationId: string }) {
+  const lot = await makeLot(ctx, given);
+  await movePieces(ctx, {
+    lotId: lot.id,
+    pieces: lot.pieces,
+    from: { place: 'making', holderId: lot.stepId },
+    to: { place: 'stock', holderId: locationId },
+    reason: 'released',
+  });
+  return lot;
 }
