@@ -17,10 +17,8 @@ import { mmFromInches } from '@/lib/trade/units/length';
 import { ksiFromMpa, mpaFromKsi } from '@/lib/trade/units/stress';
 import { fahrenheitDifferenceFromCelsius } from '@/lib/trade/units/temperature';
 
-import { numberOf, publishedRows, saidBy } from './values';
+import { named, numberOf, publishedRows } from './values';
 
-const named = <Row extends { source: string; confidence: string }>(rows: readonly Row[]) =>
-  rows.map((row) => ({ ...row, said: saidBy(row) }));
 const bare = (alloy: string, condition: string) => ({ alloy, condition, isClad: false });
 
 test('2024-T42 bare shows HRB 63 to 83 and 28.5 to 34.0 % IACS, 16.5 to 19.7 MS/m', () => {

@@ -14,7 +14,7 @@ import { HARDNESS_STEEL_HRC } from '@/lib/trade/tables/hardness-steel-hrc';
 import { mpaFromKsi } from '@/lib/trade/units/stress';
 import { celsiusFromFahrenheit, fahrenheitFromCelsius } from '@/lib/trade/units/temperature';
 
-import { numberOf, publishedRows, saidBy } from './values';
+import { named, numberOf, publishedRows } from './values';
 
 const TABLES = {
   rules: EMBRITTLEMENT_RULES,
@@ -67,7 +67,7 @@ describe('published rules, at their threshold and just beside it', () => {
     ...(row.unit === 'mpa' && { tensileMpa: numberOf(row.threshold) + off }),
     ...(row.unit === 'ksi' && { tensileMpa: mpaFromKsi(numberOf(row.threshold) + off) }),
   });
-  const cases = rows.map((row) => ({ ...row, said: saidBy(row) }));
+  const cases = named(rows);
 
   test.each(cases)('$said: $specification $revision $treatment $kind from $unit $threshold', (row) => {
     const called = { specification: row.specification, revision: row.revision };

@@ -26,13 +26,11 @@ import { PLATING_CLASSES } from '@/lib/trade/tables/plating-classes';
 import { inchesFromMm, mmFromInches } from '@/lib/trade/units/length';
 import { celsiusFromFahrenheit, fahrenheitFromCelsius } from '@/lib/trade/units/temperature';
 
-import { numberOf, publishedRows, saidBy } from './values';
+import { named, numberOf, publishedRows } from './values';
 
 const TABLES = { classes: [PLATING_CLASSES, CONVERSION_CLASSES], defaults: FINISH_DEFAULTS };
 const ordered = (specification: string, classType: string) =>
   finishAsOrdered(TABLES, { specification, classType });
-const named = <Row extends { source: string; confidence: string }>(rows: readonly Row[]) =>
-  rows.map((row) => ({ ...row, said: saidBy(row) }));
 
 test('QQ-P-416 type II class 2 is at least 0.00762 mm, with chromate and 96 h to white corrosion', () => {
   const found = ordered('QQ-P-416F', 'type II class 2');

@@ -5,5 +5,5 @@ declare module 'jstat' {
     binomial: { cdf(found: number, sample: number, fraction: number): number };
   }
   const distributions: Distributions;
-  export default distributions;
+  export = distributions;
 }

@@ -15,7 +15,7 @@ import { mmFromInches } from '@/lib/trade/units/length';
 import { mpaFromKsi } from '@/lib/trade/units/stress';
 import { celsiusFromFahrenheit } from '@/lib/trade/units/temperature';
 
-import { numberOf, publishedRows, saidBy } from './values';
+import { named, numberOf, publishedRows } from './values';
 
 test('drying before penetrant is at most 160 °F, 71.1 °C', () => {
   const found = ndtFigure(NDT_FIGURES, { method: 'penetrant', item: 'drying_temperature' });
@@ -32,19 +32,16 @@ describe('published figures', () => {
     ksi: mpaFromKsi,
   };
   const rows = publishedRows('ndt-figures', ['method', 'item', 'unit', 'min', 'max']);
-  test.each(rows.map((row) => ({ ...row, said: saidBy(row) })))(
-    '$said: $method $item $min to $max $unit',
-    (row) => {
-      const found = ndtFigure(NDT_FIGURES, { method: row.method as NdtMethod, item: row.item as NdtItem });
-      const si = (printed: string) => (INTO_SI[row.unit] ?? ((value: number) => value))(numberOf(printed));
-      expect(found.source).toMatchObject({ confidence: row.confidence, certainty: row.certainty });
-      if (!found.ok) throw new Error(found.reason);
-      if (row.min === '') expect(found.min).toBeUndefined();
-      else expect(found.min).toBeCloseTo(si(row.min), 9);
-      if (row.max === '') expect(found.max).toBeUndefined();
-      else expect(found.max).toBeCloseTo(si(row.max), 9);
-    },
-  );
+  test.each(named(rows))('$said: $method $item $min to $max $unit', (row) => {
+    const found = ndtFigure(NDT_FIGURES, { method: row.method as NdtMethod, item: row.item as NdtItem });
+    const si = (printed: string) => (INTO_SI[row.unit] ?? ((value: number) => value))(numberOf(printed));
+    expect(found.source).toMatchObject({ confidence: row.confidence, certainty: row.certainty });
+    if (!found.ok) throw new Error(found.reason);
+    if (row.min === '') expect(found.min).toBeUndefined();
+    else expect(found.min).toBeCloseTo(si(row.min), 9);
+    if (row.max === '') expect(found.max).toBeUndefined();
+    else expect(found.max).toBeCloseTo(si(row.max), 9);
+  });
   test('a figure of another method is refused', () => {
     expect(ndtFigure(NDT_FIGURES, { method: 'penetrant', item: 'residual_field' })).toMatchObject({
       reason: 'figure_not_in_table',

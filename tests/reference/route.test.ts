@@ -372,11 +372,12 @@ test.each(
   expect([...(finding?.steps ?? [])]).toEqual([...(finding?.steps ?? [])].sort((a, b) => a - b));
   expect(rulesOf(right, rightPart ?? part)).not.toContain(rule);
   const published = SOURCES.get(rule);
-  if (published)
-    expect(finding?.source).toMatchObject({
-      confidence: published.confidence,
-      certainty: published.certainty,
-    });
+  if (!published) return;
+  expect(finding?.rule).toBe(published.rule);
+  expect(finding?.source).toMatchObject({
+    confidence: published.confidence,
+    certainty: published.certainty,
+  });
 });
 
 test('every rule of the table has a route that breaks it', () => {

@@ -20,13 +20,11 @@ import {
   fahrenheitFromCelsius,
 } from '@/lib/trade/units/temperature';
 
-import { numberOf, publishedRows, saidBy } from './values';
+import { named, numberOf, publishedRows } from './values';
 
 const TEMPERING = { tempering: STEEL_TEMPERING, bands: TEMPER_BANDS };
 const temperOf = (steel: string, lowKsi: number, highKsi: number) =>
   temperWindow(TEMPERING, { steel, tensileMpaMin: mpaFromKsi(lowKsi), tensileMpaMax: mpaFromKsi(highKsi) });
-const named = <Row extends { source: string; confidence: string }>(rows: readonly Row[]) =>
-  rows.map((row) => ({ ...row, said: saidBy(row) }));
 
 describe('furnace ranges of steels', () => {
   test('4130 is austenitized at 829.4 to 885.0 °C', () => {

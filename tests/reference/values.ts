@@ -80,3 +80,7 @@ export const casesOf = <Row extends { source: string; confidence: string }>(
   rows: readonly Row[],
   says: (row: Row) => string,
 ): [name: string, row: Row][] => rows.map((row) => [`${says(row)} (${saidBy(row)})`, row]);
+
+/** The rows with `said` beside them for the names of tests; copies would not be noted when they are read. */
+export const named = <Row extends { source: string; confidence: string }>(rows: readonly Row[]) =>
+  rows.map((row) => Object.assign(row, { said: saidBy(row) }));
