@@ -116,7 +116,7 @@ function BatchLine({ row, clock }: { row: BatchRow; clock: Clock }) {
           backWords(row, clock, day)
         )}
       </Cell>
-      <Cell code head="Order">
+      <Cell code head="Order" className="whitespace-nowrap">
         {row.orderNumber}
       </Cell>
     </Row>

@@ -17,7 +17,7 @@ import { certificateName, STATE_WORDS } from './certificate-words';
 
 const COLUMNS = [
   { says: 'Certificate' },
-  { says: 'Dated' },
+  { says: 'Dated', className: 'md:max-lg:hidden' },
   { says: 'Batch' },
   { says: 'From' },
   { says: 'Came' },
@@ -90,12 +90,14 @@ function CertificateLine({ row }: { row: CertificateRow }) {
   const clock = useClock();
   return (
     <Row state={row.state === 'set_aside' ? 'off' : 'rest'}>
-      <Cell>
+      <Cell className="max-w-96 min-w-28 [overflow-wrap:anywhere]">
         <Link href={`/certificates/${row.id}`} className="num font-semibold">
           {certificateName(row)}
         </Link>
       </Cell>
-      <Cell head="Dated">{row.datedOn && <Day day={row.datedOn} clock={clock} short />}</Cell>
+      <Cell head="Dated" className="whitespace-nowrap md:max-lg:hidden">
+        {row.datedOn && <Day day={row.datedOn} clock={clock} short />}
+      </Cell>
       <Cell>
         <BatchTag stage={row.stage} number={row.batchNumber} href={`/batches/${row.batchId}`} size="row" />
       </Cell>

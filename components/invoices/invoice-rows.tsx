@@ -23,7 +23,7 @@ export function InvoiceRows({ rows, label, ofOneBatch = false }: InvoiceRowsProp
   const columns = [
     { says: 'Invoice' },
     ...(ofOneBatch ? [] : [{ says: 'Batch' }, { says: 'From' }]),
-    { says: 'Order' },
+    { says: 'Order', className: 'md:max-lg:hidden' },
     { says: 'Dated' },
     { says: 'Due' },
     { says: 'Invoiced', right: true },
@@ -45,7 +45,7 @@ function InvoiceLine({ row, ofOneBatch }: { row: InvoiceRow; ofOneBatch: boolean
   const isLate = isOpen && row.dueOn !== null && daysUntil(row.dueOn, clock) < 0;
   return (
     <Row state={row.state === 'refused' ? 'off' : 'rest'}>
-      <Cell>
+      <Cell className="max-w-80 min-w-24 [overflow-wrap:anywhere]">
         <Link href={`/invoices/${row.id}`} className="num font-semibold">
           {invoiceName(row)}
         </Link>
@@ -56,11 +56,13 @@ function InvoiceLine({ row, ofOneBatch }: { row: InvoiceRow; ofOneBatch: boolean
         </Cell>
       )}
       {!ofOneBatch && <Cell head="From">{row.processor}</Cell>}
-      <Cell code head="Order">
+      <Cell code head="Order" className="whitespace-nowrap md:max-lg:hidden">
         {row.orderNumber}
       </Cell>
-      <Cell head="Dated">{row.datedOn && <Day day={row.datedOn} clock={clock} short />}</Cell>
-      <Cell head="Due" className={isLate ? 'text-held-ink' : ''}>
+      <Cell head="Dated" className="whitespace-nowrap">
+        {row.datedOn && <Day day={row.datedOn} clock={clock} short />}
+      </Cell>
+      <Cell head="Due" className={`whitespace-nowrap ${isLate ? 'text-held-ink' : ''}`}>
         {row.dueOn && <Day day={row.dueOn} clock={clock} short />}
         {isLate && ', past'}
       </Cell>

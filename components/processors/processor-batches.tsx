@@ -64,7 +64,7 @@ function BatchLine({ row, clock }: { row: BatchRow; clock: Clock }) {
       <Cell>
         <BatchTag stage={row.stage} number={row.number} size="row" href={`/batches/${row.id}`} />
       </Cell>
-      <Cell code head="Order">
+      <Cell code head="Order" className="whitespace-nowrap">
         {row.orderNumber}
       </Cell>
       <Cell head="Process">{PROCESS_WORDS[row.process]}</Cell>

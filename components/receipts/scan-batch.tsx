@@ -112,7 +112,7 @@ function OutRow({ row }: { row: BatchRow }) {
       <Cell>
         <BatchTag stage={row.stage} number={row.number} href={`/batches/${row.id}/receive`} />
       </Cell>
-      <Cell code head="Order">
+      <Cell code head="Order" className="whitespace-nowrap">
         {row.orderNumber}
       </Cell>
       <Cell>{row.processor}</Cell>
