@@ -1,6 +1,8 @@
 import { eq } from 'drizzle-orm';
 
 import { batches } from '@/db/schema/batches';
+import type { Ctx } from '@/lib/auth/context';
+import { cancelBatch } from '@/lib/batches/cancel-batch';
 import { createBatch } from '@/lib/batches/create-batch';
 import { dispatchBatch } from '@/lib/batches/dispatch-batch';
 import { setRequirements } from '@/lib/batches/set-requirements';
@@ -44,6 +46,8 @@ export interface BatchPlot {
   /** Days of begun that are promised, in turn. */
   promises?: readonly number[];
   question?: { after: number; body: string };
+  /** Called back before anything of it came back. */
+  cancelled?: { after: number; reason: string };
   shippedAfter?: number;
   receivedAfter?: number;
   /** Short of the last line in this delivery. */
@@ -103,13 +107,16 @@ export async function* batchThread(
 
   yield at(plot.dispatchedAfter, 8);
   await inYard(crew.lead, at(plot.dispatchedAfter, 8), async (ctx) => {
-    const [row] = await ctx.tx
-      .select({ version: batches.version })
-      .from(batches)
-      .where(eq(batches.id, batchId));
-    return dispatchBatch(ctx, { batchId, version: row?.version ?? 1 });
+    return dispatchBatch(ctx, { batchId, version: await versionOf(ctx, batchId) });
   });
   yield* atTheProcessor(play, plot, { batchId, at });
+  if (plot.cancelled) {
+    const { after, reason } = plot.cancelled;
+    yield at(after, 11);
+    await inYard(crew.lead, at(after, 11), async (ctx) =>
+      cancelBatch(ctx, { batchId, version: await versionOf(ctx, batchId), reason }),
+    );
+  }
   if (plot.receivedAfter === undefined) return batchId;
 
   yield at(plot.receivedAfter, 14);
@@ -160,6 +167,14 @@ export async function* batchThread(
   return batchId;
 }
 
+async function versionOf(ctx: Ctx, batchId: string): Promise<number> {
+  const [row] = await ctx.tx
+    .select({ version: batches.version })
+    .from(batches)
+    .where(eq(batches.id, batchId));
+  return row?.version ?? 1;
+}
+
 interface Scene {
   batchId: string;
   at(days: number, hour?: number): Date;
@@ -201,11 +216,7 @@ async function* atTheProcessor(
   }
 }
 
-async function countBack(
-  ctx: Parameters<typeof countIn>[0],
-  batchId: string,
-  missing: number,
-): Promise<void> {
+async function countBack(ctx: Ctx, batchId: string, missing: number): Promise<void> {
   const { lines } = await getReceiving(ctx, { batchId });
   const counted = lines.map((line, at) => {
     const good = line.away - (at === lines.length - 1 ? missing : 0);

@@ -17,7 +17,7 @@ type Plot = Campaign['steps'][number];
 const plot = (given: { [K in keyof Plot]: Plot[K] | undefined }): Plot =>
   Object.fromEntries(Object.entries(given).filter(([, value]) => value !== undefined)) as unknown as Plot;
 
-/** What is under way today: a batch in every stage, two late, one held, one with an invoice that does not match. */
+/** What is under way today: a batch in every stage, two late, one held, one called back, one with an invoice that does not match. */
 const PRESENT: readonly Campaign[] = [
   // Late at the inspection house, and the spreader bars are already waiting.
   {
@@ -170,6 +170,23 @@ const PRESENT: readonly Campaign[] = [
       ['MC-2220-03', 18],
     ],
     steps: [plot({ ...out, promises: [], acknowledgedAfter: 2 })],
+  },
+  // Called back the day after it left: the drawing changes first, and the cups wait again.
+  {
+    startedDaysAgo: 8,
+    parts: [['MC-1150-01', 30]],
+    steps: [
+      plot({
+        ...out,
+        acknowledgedAfter: undefined,
+        promises: [],
+        cancelled: {
+          after: 2,
+          reason:
+            'The bore of the cup changes with revision B of the drawing. Do not start; the van fetches them.',
+        },
+      }),
+    ],
   },
   // Left yesterday, not acknowledged.
   {
