@@ -84,7 +84,9 @@ function Zoom({ dayPx, onChange }: { dayPx: DayWidth; onChange: (dayPx: DayWidth
             data-key={key}
             aria-keyshortcuts={key}
             aria-label={says}
-            onClick={() => next !== undefined && onChange(next)}
+            onClick={() => {
+              if (next !== undefined) onChange(next);
+            }}
             notNow={next === undefined ? end : undefined}
             reasonAt="elsewhere"
           >
