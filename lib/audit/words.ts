@@ -69,9 +69,13 @@ const fieldWords = (name: string): string =>
     .replaceAll('_', ' ')
     .toLowerCase();
 
+/** Kept to the thousandth of a second in UTC; the entry itself keeps the rest. */
+const MOMENT = /^\d{4}-\d\d-\d\dT\d\d:\d\d:\d\d(?:\.\d+)?Z$/;
+
 function valueWords(value: unknown): string | null {
   if (value === undefined || value === null || value === '') return null;
-  if (typeof value === 'string') return value;
+  if (typeof value === 'string')
+    return MOMENT.test(value) ? `${value.slice(0, 10)} ${value.slice(11, 16)} UTC` : value;
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
   if (Array.isArray(value))
     return value

@@ -39,3 +39,10 @@ test('an action is its verb, and a thing with a page links to it', () => {
   expect(pageOfThing('batch', 'b1')).toBe('/batches/b1');
   expect(pageOfThing('token', 't1')).toBeNull();
 });
+
+test('a moment is told to the minute, and anything that only looks like one stays as it is', () => {
+  const told = (value: string) => changesBetween(null, { at: value })[0]?.after;
+  expect(told('2026-12-01T09:26:41.569Z')).toBe('2026-12-01 09:26 UTC');
+  expect(told('2026-12-01')).toBe('2026-12-01');
+  expect(told('see 2026-12-01T09:26:41Z')).toBe('see 2026-12-01T09:26:41Z');
+});
