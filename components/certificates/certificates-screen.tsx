@@ -2,7 +2,7 @@
 import Link from 'next/link';
 
 import { usePages } from '@/components/api/use-api';
-import { useClock } from '@/components/session/use-me';
+import { useClock, useMay } from '@/components/session/use-me';
 import { Button, ButtonLink } from '@/components/ui/button';
 import { Day, Moment } from '@/components/ui/day';
 import { Empty } from '@/components/ui/empty';
@@ -35,6 +35,7 @@ export function CertificatesScreen() {
   const rows = data?.pages.flatMap((page) => page.rows) ?? [];
   const waiting = rows.filter((row) => row.state === 'waiting');
   const done = rows.filter((row) => row.state !== 'waiting');
+  const mayCount = useMay('receipt.count');
   return (
     <>
       <PageHead
@@ -42,7 +43,7 @@ export function CertificatesScreen() {
         sub={isPending ? undefined : waitingWords(waiting.length)}
         actions={
           <>
-            <ButtonLink href="/receive">Count in</ButtonLink>
+            {mayCount && <ButtonLink href="/receive">Count in</ButtonLink>}
             <ButtonLink href="/nonconformances">Nonconformances</ButtonLink>
           </>
         }

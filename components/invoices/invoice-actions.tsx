@@ -19,6 +19,7 @@ import { useInvoiceWrite } from './use-invoice-write';
 export function InvoiceActions({ invoice }: { invoice: InvoiceDetail }) {
   const [open, setOpen] = useState<'refuse' | 'credit' | null>(null);
   const mayApprove = useMay('invoice.approve');
+  const mayWrite = useMay('batch.message');
   const { state, approved, balanceMinor } = invoice;
   const mayCredit = mayApprove && approved !== null && balanceMinor > 0 && state !== 'paying';
   return (
@@ -26,7 +27,11 @@ export function InvoiceActions({ invoice }: { invoice: InvoiceDetail }) {
       <Now invoice={invoice} />
       {state !== 'refused' && (
         <div className="flex flex-wrap gap-2.5 [&>*]:flex-1">
-          <ButtonLink href={`/batches/${invoice.batchId}#messages`}>Write to {invoice.processor}</ButtonLink>
+          {mayWrite && (
+            <ButtonLink href={`/batches/${invoice.batchId}#messages`}>
+              Write to {invoice.processor}
+            </ButtonLink>
+          )}
           {mayApprove && approved === null && (
             <Button look="stop" onClick={() => setOpen('refuse')}>
               Refuse invoice
@@ -105,10 +110,9 @@ function Approve({ invoice }: { invoice: InvoiceDetail }) {
   const waiting = invoice.differences
     .filter((one) => one.clearance === null)
     .map((one) => (one.seq === null ? 'the whole' : `line ${one.seq}`));
-  const notNow =
-    waiting.length > 0
-      ? `Approve waits for ${[...new Set(waiting)].join(' and ')}.`
-      : !mayApprove && 'The office approves.';
+  const notNow = waiting.length > 0 && `Approve waits for ${[...new Set(waiting)].join(' and ')}.`;
+  // Whoever only reads is told whose it is; a button that is never theirs would be a dead one.
+  if (!mayApprove) return <p className="text-quiet">The office approves. {notNow}</p>;
   return (
     <Button
       look="primary"
@@ -127,12 +131,13 @@ function Approve({ invoice }: { invoice: InvoiceDetail }) {
 function ApproveSecond({ invoice }: { invoice: InvoiceDetail }) {
   const maySecond = useMay('invoice.approve_second');
   const { run } = useInvoiceWrite(approveInvoiceSecond);
+  if (!maySecond) return <p className="text-quiet">An admin approves a second time.</p>;
   return (
     <Button
       look="primary"
       size="big"
       className="w-full"
-      notNow={whyNotSecond(invoice, maySecond)}
+      notNow={whyNotSecond(invoice)}
       reasonAt="below"
       busyLabel="Approving"
       onClick={() => run({ invoiceId: invoice.id, version: invoice.version })}
@@ -142,7 +147,6 @@ function ApproveSecond({ invoice }: { invoice: InvoiceDetail }) {
   );
 }
 
-function whyNotSecond({ approved }: InvoiceDetail, maySecond: boolean): string | false {
-  if (!maySecond) return 'An admin approves a second time.';
+function whyNotSecond({ approved }: InvoiceDetail): string | false {
   return approved?.byMe === true && 'You approved it first. The second approval is another person’s.';
 }

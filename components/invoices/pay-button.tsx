@@ -22,19 +22,20 @@ export function PayButton({ invoice }: { invoice: InvoiceDetail }) {
     await run({ invoiceId: invoice.id, version: invoice.version });
     setOpen(false);
   };
+  if (!mayPay) return <p className="text-quiet">The office pays {amountText(balanceMinor)}.</p>;
   return (
     <>
       <Button
         look="primary"
         size="big"
         className="w-full"
-        notNow={whyNot(invoice, mayPay)}
+        notNow={whyNot(invoice)}
         reasonAt="below"
         onClick={() => setOpen(true)}
       >
         {says}
       </Button>
-      {mayPay && !payable.methodSaved && (
+      {!payable.methodSaved && (
         <p className="text-second">
           <Link href="/settings/payments">How the shop pays</Link>
         </p>
@@ -59,8 +60,7 @@ export function PayButton({ invoice }: { invoice: InvoiceDetail }) {
   );
 }
 
-function whyNot({ payable, processor }: InvoiceDetail, mayPay: boolean): string | false {
-  if (!mayPay) return 'The office pays.';
+function whyNot({ payable, processor }: InvoiceDetail): string | false {
   if (payable.otherHands) return 'You approved it. In this shop another person pays what one has approved.';
   if (!payable.methodSaved) return 'The shop has no way to pay yet. An admin saves one.';
   return (
