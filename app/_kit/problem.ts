@@ -2,6 +2,7 @@ import { DrizzleQueryError } from 'drizzle-orm/errors';
 import { DatabaseError } from 'pg';
 import { ZodError } from 'zod';
 
+import { isAway } from '@/db/is-away';
 import type { Problem } from '@/lib/api/shapes';
 import { AppError, type ErrorCode } from '@/lib/errors';
 import { log } from '@/lib/log';
@@ -62,14 +63,14 @@ function asRefusal(error: unknown): AppError | null {
       fields: error.issues.map((issue) => ({ field: issue.path.join('.'), message: issue.message })),
     });
   }
-  const cause = error instanceof DrizzleQueryError ? error.cause : error;
-  if (cause instanceof DatabaseError) return fromDatabase(cause);
-  if (isLostConnection(cause))
+  // A line that breaks at the very end leaves open whether it was done, so nothing is claimed.
+  if (isAway(error))
     return new AppError(
       'unavailable',
-      'The database does not answer just now. Nothing was changed. Try again in a moment.',
+      'The database does not answer just now. Look again in a moment before you repeat what you did.',
     );
-  return null;
+  const cause = error instanceof DrizzleQueryError ? error.cause : error;
+  return cause instanceof DatabaseError ? fromDatabase(cause) : null;
 }
 
 /** Refusals of the database that a race can bring about although the verb looked first. */
@@ -85,28 +86,7 @@ function fromDatabase(error: DatabaseError): AppError | null {
     case '40001':
     case '40P01':
       return new AppError('unavailable', 'Two people changed this at the same moment. Try again.');
-    case '57P01':
-    case '57P02':
-    case '57P03':
-    case '08006':
-    case '08003':
-    case '53300':
-      return new AppError(
-        'unavailable',
-        'The database does not answer just now. Nothing was changed. Try again in a moment.',
-      );
     default:
       return null;
   }
-}
-
-function isLostConnection(error: unknown): boolean {
-  if (!(error instanceof Error)) return false;
-  const code = 'code' in error ? String(error.code) : '';
-  return (
-    ['ECONNREFUSED', 'ECONNRESET', 'EPIPE', 'ETIMEDOUT'].includes(code) ||
-    /Connection terminated|timeout exceeded when trying to connect|Client has encountered a connection error/.test(
-      error.message,
-    )
-  );
 }
