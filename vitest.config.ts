@@ -35,7 +35,7 @@ export default defineConfig({
         test: {
           name: 'faults',
           include: ['tests/faults/**/*.test.ts'],
-          globalSetup: ['tests/services/global-setup.ts'],
+          globalSetup: ['tests/services/global-setup.ts', 'tests/faults/bundle-parts.ts'],
           // Each file kills servers of its own; two at once would only measure the machine.
           fileParallelism: false,
           testTimeout: 900_000,

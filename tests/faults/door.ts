@@ -2,7 +2,12 @@ import { createServer, type IncomingMessage } from 'node:http';
 import { buffer } from 'node:stream/consumers';
 
 import { serve } from '@/app/_kit/serve';
+import { serveRaw } from '@/app/_kit/serve-raw';
 import { ALL_ENDPOINTS } from '@/lib/api/all-endpoints';
+import type { Endpoint } from '@/lib/api/endpoint';
+import { receivePaymentEventEndpoint } from '@/lib/payments/endpoints';
+
+import { whenTold } from './when-told';
 
 /**
  * The application's door in a process of its own that may be killed at any moment: the same handlers as the web
@@ -11,7 +16,7 @@ import { ALL_ENDPOINTS } from '@/lib/api/all-endpoints';
 const routes = ALL_ENDPOINTS.map((endpoint) => ({
   method: endpoint.declaration.method.toUpperCase(),
   pattern: new RegExp(`^/api${endpoint.declaration.path.replace(/\{(\w+)\}/g, '(?<$1>[^/]+)')}$`),
-  handle: serve(endpoint),
+  handle: isWebhook(endpoint) ? serveRaw(endpoint, 'stripe-signature') : serve(endpoint),
 }));
 
 const server = createServer((incoming, outgoing) => {
@@ -20,6 +25,10 @@ const server = createServer((incoming, outgoing) => {
     outgoing.end(Buffer.from(await response.arrayBuffer()));
   });
 });
+
+function isWebhook(endpoint: Endpoint): boolean {
+  return endpoint.declaration.id === receivePaymentEventEndpoint.declaration.id;
+}
 
 async function answer(incoming: IncomingMessage): Promise<Response> {
   const url = new URL(incoming.url ?? '/', `http://${incoming.headers.host ?? 'localhost'}`);
@@ -38,4 +47,4 @@ async function answer(incoming: IncomingMessage): Promise<Response> {
   return Response.json({ title: 'no such route' }, { status: 404 });
 }
 
-server.listen(Number(process.argv[2]), '127.0.0.1');
+whenTold(() => void server.listen(Number(process.argv[2]), '127.0.0.1'));

@@ -1,75 +1,88 @@
 import { spawn, type ChildProcess } from 'node:child_process';
 import { once } from 'node:events';
 
-import { build } from 'esbuild';
-
-/** Bundles an entry of ours into one file, packages left outside, so that a killed process is up again in a second. */
-export async function bundle(entry: string, name: string): Promise<string> {
-  const outfile = `.data/test/faults/${name}.mjs`;
-  await build({
-    entryPoints: [entry],
-    outfile,
-    bundle: true,
-    platform: 'node',
-    format: 'esm',
-    target: 'node20',
-    packages: 'external',
-    jsx: 'automatic',
-    logLevel: 'error',
-  });
-  return outfile;
-}
-
-/** A process that is killed without a word, and started again. */
+/**
+ * A process of ours that is killed without a word and started again. The next one may stand loaded beside it, to be
+ * told only to begin, so that no round waits for a program to be read.
+ */
 export class Killable {
-  private child: ChildProcess | null = null;
+  private running: ChildProcess | null = null;
+  private spare: ChildProcess | null = null;
 
   constructor(
-    private readonly script: string,
-    private readonly args: readonly string[],
+    private readonly command: readonly string[],
     private readonly env: Readonly<Record<string, string>>,
     private readonly health: string,
   ) {}
 
   async start(): Promise<void> {
-    this.child = spawn(process.execPath, [this.script, ...this.args], {
-      env: { ...process.env, ...this.env },
-      stdio: ['ignore', 'ignore', 'inherit'],
-    });
-    for (const deadline = Date.now() + 30_000; Date.now() < deadline;) {
-      if (
-        await fetch(this.health).then(
-          (response) => response.ok,
-          () => false,
-        )
-      )
-        return;
-      await new Promise((resolve) => setTimeout(resolve, 25));
+    this.running = this.spare ?? this.load();
+    this.running.stdin?.write('begin\n');
+    this.spare = null;
+    await this.isUp();
+  }
+
+  /** Loads the next one beforehand. */
+  prepare(): void {
+    this.spare ??= this.load();
+  }
+
+  /** Waits until it answers, whoever starts it. */
+  async isUp(): Promise<void> {
+    for (const deadline = Date.now() + 300_000; Date.now() < deadline;) {
+      if (await answers(this.health)) return;
+      await new Promise((resolve) => setTimeout(resolve, 20));
     }
-    throw new Error(`${this.script} did not come up`);
+    throw new Error(`${this.command.join(' ')} did not come up`);
+  }
+
+  /** The process that runs now; it stays the same as long as nobody dies. */
+  get pid(): number | null {
+    const { running } = this;
+    return running && running.exitCode === null && running.signalCode === null ? (running.pid ?? null) : null;
   }
 
   /** SIGKILL: nothing in it gets a chance to tidy up. */
   async kill(): Promise<void> {
-    const child = this.child;
-    this.child = null;
-    if (!child || child.exitCode !== null || child.signalCode !== null) return;
-    const gone = once(child, 'exit');
-    child.kill('SIGKILL');
-    await gone;
+    await end(this.running);
+    this.running = null;
   }
 
   /** Kills it after so many milliseconds, whatever it does then. */
-  killAfter(ms: number): Promise<void> {
-    return new Promise((resolve) => setTimeout(() => void this.kill().then(resolve), ms));
+  async killAfter(ms: number): Promise<void> {
+    await new Promise((resolve) => setTimeout(resolve, ms));
+    await this.kill();
+  }
+
+  /** Leaves nothing behind. */
+  async close(): Promise<void> {
+    await this.kill();
+    await end(this.spare);
+    this.spare = null;
+  }
+
+  private load(): ChildProcess {
+    return spawn(process.execPath, this.command, {
+      env: { ...process.env, ...this.env },
+      stdio: ['pipe', 'ignore', 'inherit'],
+      // A group of its own, as the parts of the product have; it ends with its input, whatever becomes of us.
+      detached: true,
+    });
   }
 }
 
-/** Numbers between 0 and 1 that are the same in every run, so that a round that fails can be looked at again. */
-export function seeded(seed: number): () => number {
-  let state = seed;
-  return () => {
-    state = (Math.imul(state, 1_664_525) + 1_013_904_223) >>> 0;
-    return state / 2 ** 32;
-  };
+async function end(child: ChildProcess | null): Promise<void> {
+  if (!child || child.exitCode !== null || child.signalCode !== null) return;
+  const gone = once(child, 'exit');
+  child.kill('SIGKILL');
+  await gone;
 }
+
+const answers = (url: string): Promise<boolean> =>
+  fetch(url).then(
+    async (response) => {
+      await response.arrayBuffer();
+      return response.ok;
+    },
+    () => false,
+  );

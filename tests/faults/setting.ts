@@ -1,101 +1,98 @@
-import { encode } from 'next-auth/jwt';
+import { mkdtemp, rm } from 'node:fs/promises';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import { sql } from 'drizzle-orm';
 import { afterAll, beforeAll } from 'vitest';
 
 import { connect, type Db } from '@/db/client';
-import { env } from '@/lib/env';
+import { startPaymentsServer, type PaymentsServer } from '@/fakes/payments/server';
 
+import { makeWorld, type World } from '../factories/world';
 import { makeDatabase } from '../services/database';
-import { bundle, Killable } from './killable';
+import { DOOR, DOOR_PORT, WORKER_PORT } from './addresses';
+import { cookieOf } from './browser';
+import { bundleOf } from './bundle-parts';
+import { Killable } from './killable';
 
-const DOOR_PORT = 5701;
-const DOOR = `http://127.0.0.1:${DOOR_PORT}`;
-const COOKIE = 'authjs.session-token';
+const SECRET = 'whsec_of_the_fault_tests';
 
 export interface Setting {
   db: Db;
   owner: Db;
   door: Killable;
+  /** The first is the one that is killed; the others help to clear up. */
+  workers: readonly [Killable, Killable, Killable];
+  payments: PaymentsServer;
 }
 
-/** A database, and a door to be killed. */
+/** The processes of the product at a database, none of them started. */
+export function partsAt(urls: { appUrl: string; ownerUrl: string }, paymentsAddress: string) {
+  const env = {
+    DATABASE_URL: urls.appUrl,
+    DATABASE_OWNER_URL: urls.ownerUrl,
+    APP_URL: DOOR,
+    STRIPE_API_BASE: paymentsAddress,
+    STRIPE_SECRET_KEY: 'sk_test_local',
+    STRIPE_WEBHOOK_SECRET: SECRET,
+    NODE_ENV: 'production',
+  };
+  const worker = (port: number) =>
+    new Killable(
+      [bundleOf('worker')],
+      { ...env, WORKER_PORT: String(port) },
+      `http://127.0.0.1:${port}/health`,
+    );
+  return {
+    door: new Killable([bundleOf('door'), String(DOOR_PORT)], env, `${DOOR}/api/health`),
+    workers: [worker(WORKER_PORT), worker(WORKER_PORT + 1), worker(WORKER_PORT + 2)] as const,
+  };
+}
+
+/** A database, a door that is up, workers that are not, and a payment service that lives on. */
 export function openSetting(): Setting {
   const setting = {} as Setting;
   let close = () => Promise.resolve();
   beforeAll(async () => {
     const database = await makeDatabase();
     const [app, owner] = [connect(database.appUrl), connect(database.ownerUrl, 4)];
-    const settings = {
-      DATABASE_URL: database.appUrl,
-      DATABASE_OWNER_URL: database.ownerUrl,
-      APP_URL: DOOR,
-      LOG_LEVEL: 'silent',
-      NODE_ENV: 'production',
-    };
-    const door = new Killable(
-      await bundle('tests/faults/door.ts', 'door'),
-      [String(DOOR_PORT)],
-      settings,
-      `${DOOR}/api/health`,
-    );
-    Object.assign(setting, { db: app.db, owner: owner.db, door });
-    await door.start();
+    const folder = await mkdtemp(join(tmpdir(), 'faults-'));
+    const payments = await startPaymentsServer({
+      port: 0,
+      file: join(folder, 'payments.json'),
+      webhookUrl: `${DOOR}/api/webhooks/payments`,
+      webhookSecret: SECRET,
+      settleAfterMs: 50,
+    });
+    const parts = partsAt(database, payments.address);
+    Object.assign(setting, { db: app.db, owner: owner.db, payments, ...parts });
     close = async () => {
-      await door.kill();
+      await Promise.all([parts.door.close(), ...parts.workers.map((worker) => worker.close())]);
+      await payments.close();
       await Promise.all([app.pool.end(), owner.pool.end()]);
       await database.drop();
+      await rm(folder, { recursive: true, force: true });
     };
+    await parts.door.start();
   });
   afterAll(() => close());
   return setting;
 }
 
-/** The cookie that the browser of a person of the shop would send. */
-export async function cookieOf(userId: string, shopId: string): Promise<string> {
-  const token = await encode({
-    token: { claims: { kind: 'person', userId, sessionVersion: 1, shopId } },
-    secret: env.AUTH_SECRET,
-    salt: COOKIE,
-  });
-  return `${COOKIE}=${token}`;
+/** A shop of its own, and the cookie of its person's browser. */
+export async function aWorld({
+  db,
+  owner,
+}: Pick<Setting, 'db' | 'owner'>): Promise<{ world: World; cookie: string }> {
+  const world = await makeWorld(db, owner);
+  return { world, cookie: await cookieOf(world.userId, world.shopId) };
 }
 
-interface Asked {
-  path: string;
-  cookie: string;
-  /** The same for every try, as the browser sends it. */
-  key: string;
-  body: object;
-}
-
-/** One try; null where the answer was lost with the process. */
-export async function tryOnce({
-  path,
-  cookie,
-  key,
-  body,
-}: Asked): Promise<{ status: number; body: unknown } | null> {
-  try {
-    const response = await fetch(`${DOOR}/api${path}`, {
-      method: 'POST',
-      headers: { cookie, 'content-type': 'application/json', 'idempotency-key': key },
-      body: JSON.stringify(body),
-    });
-    return { status: response.status, body: await response.json() };
-  } catch {
-    return null;
-  }
-}
-
-/** What a browser does after a lost answer: the same call with the same key, until there is one. */
-export async function tryUntilAnswered(
-  setting: Setting,
-  asked: Asked,
-): Promise<{ status: number; body: unknown }> {
-  for (let tries = 0; tries < 5; tries++) {
-    await setting.door.kill();
-    await setting.door.start();
-    const answered = await tryOnce(asked);
-    if (answered && answered.status !== 503) return answered;
-  }
-  throw new Error(`${asked.path} was never answered`);
+export async function count(
+  { owner }: Pick<Setting, 'owner'>,
+  statement: ReturnType<typeof sql>,
+): Promise<number> {
+  const { rows } = await owner.execute<{ n: number }>(
+    sql`select count(*)::int as n from (${statement}) counted`,
+  );
+  return rows[0]?.n ?? -1;
 }

@@ -39,7 +39,7 @@ export async function runJobs(base: { db: Db; owner: Db }, job: Job): Promise<Ra
 }
 
 /** Never started: it only words the statements, which go over the owner's own connections. */
-function queueOf(owner: Db): PgBoss {
+export function queueOf(owner: Db): PgBoss {
   const pool = (owner as Db & { $client: pg.Pool }).$client;
   return new PgBoss({
     schema: 'pgboss',
