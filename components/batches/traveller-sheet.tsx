@@ -47,6 +47,15 @@ export function TravellerSheet({ says, small = false }: { says: TravellerSays; s
             [`${one.characteristic} ${limitWords(one)}`, linesWords(one.lines)].filter(Boolean).join(', '),
           )}
         />
+        {says.orderStates !== undefined && says.orderStates.length > 0 && (
+          <SheetList
+            title="The order states"
+            small={small}
+            items={says.orderStates.map((one) =>
+              [`${one.item}: ${one.says}`, linesWords(one.lines)].filter(Boolean).join(', '),
+            )}
+          />
+        )}
         <SheetList
           title="Cautions"
           small={small}

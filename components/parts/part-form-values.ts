@@ -14,6 +14,7 @@ export const EMPTY_STEP = {
   conditionBefore: '',
   targetCondition: '',
   toProve: [],
+  ordering: {},
   note: '',
 } as unknown as StepValues;
 export const EMPTY_PROOF = {
@@ -75,6 +76,7 @@ export function valuesOf(part: Part): PartValues {
       conditionBefore: step.conditionBefore ?? '',
       targetCondition: step.targetCondition ?? '',
       toProve: step.toProve,
+      ordering: step.ordering,
       note: step.note ?? '',
     })),
   };

@@ -15,6 +15,7 @@ import {
 } from 'drizzle-orm/pg-core';
 
 import { PROCESSES, PRODUCT_FORMS } from '@/lib/trade/process';
+import type { OrderingAnswers } from '@/lib/parts/ordering-answers';
 import type { ToProve } from '@/lib/parts/to-prove';
 
 import { createdColumn, idColumn, measure, moment, ownShopOnly, shopColumn } from './columns';
@@ -82,6 +83,8 @@ export const routeSteps = pgTable(
     conditionBefore: text('condition_before'),
     targetCondition: text('target_condition'),
     toProve: jsonb('to_prove').$type<ToProve[]>().notNull().default([]),
+    /** What the order states beside the columns here. */
+    ordering: jsonb('ordering').$type<OrderingAnswers>().notNull().default({}),
     note: text('note'),
   },
   (t) => [

@@ -18,6 +18,8 @@ interface Step {
   to: readonly [specification: string, revision: string, classType: string];
   conditions?: readonly [before: string, after: string];
   toProve: readonly ToProve[];
+  /** What the order states beside the fields above. */
+  ordering?: PartInput['route'][number]['ordering'];
 }
 
 const step = ({
@@ -25,6 +27,7 @@ const step = ({
   to: [specification, specificationRevision, classType],
   conditions: [conditionBefore, targetCondition] = ['', ''],
   toProve,
+  ordering = {},
 }: Step): PartInput['route'][number] => ({
   process,
   specification,
@@ -33,6 +36,7 @@ const step = ({
   conditionBefore,
   targetCondition,
   toProve: [...toProve, ...PAPERS],
+  ordering,
   note: '',
 });
 
@@ -94,11 +98,30 @@ const ANODIZE = step({
     prove('Coating weight', '600 or more', 'mg/ft²'),
     prove('Salt spray', 'panel of this month', '', 'specification'),
   ],
+  ordering: {
+    coating_thickness: 'by the coating weight',
+    areas: 'all over, no masking',
+    contact_marks: 'in tooling holes only',
+    build_up: 'before coating; sizes on the drawing are bare',
+    sampling_plan: 'by the specification',
+    abrasion_test: 'none',
+  },
 });
 const FILM = step({
   process: 'chemical_film',
   to: ['MIL-DTL-5541', 'F', 'type II class 1A'],
   toProve: [prove('Appearance', 'continuous, no powder'), prove('Salt spray', 'panel of this month')],
+  ordering: {
+    method: 'immersion',
+    colour: 'as it comes out',
+    touch_up_damage: 'allowed, as the specification says',
+    touch_up_contact_marks: 'allowed',
+    paint_adhesion_test: 'may be left out',
+    test_specimens: 'of this month',
+    next_step: 'epoxy primer, in the shop',
+    sampling_plan: 'by the specification',
+    lot_size: 'one line of the order',
+  },
 });
 const CADMIUM = step({
   process: 'cadmium_plate',

@@ -31,6 +31,7 @@ export async function readLinesAsTheyAre(ctx: Ctx, batchId: string) {
       conditionBefore: step.conditionBefore,
       targetCondition: step.targetCondition,
       stepNote: step.note,
+      ordering: step.ordering,
       serials: lot.serialised ? await serialsPackedIn(ctx, line.id) : [],
     };
     withSerials.push({ line, now, part });

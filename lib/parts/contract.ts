@@ -6,6 +6,7 @@ import { PLACES } from '@/lib/stock/places';
 
 import { readMeasure, type Quantity } from './measure';
 import { PROCESSES, PRODUCT_FORMS } from '@/lib/trade/process';
+import { OrderingAnswers } from './ordering-answers';
 import { ToProve } from './to-prove';
 
 const must = (name: string, longest: number) =>
@@ -34,6 +35,8 @@ export const StepInput = z.object({
   conditionBefore: may('The condition before', 24),
   targetCondition: may('The condition after', 24),
   toProve: z.array(ToProve).max(30, 'Keep it to 30 things to prove.').default([]),
+  /** What the order states beside the fields here, by item of the ordering information. */
+  ordering: OrderingAnswers.default({}),
   note: may('The note', 500),
 });
 export type StepInput = z.output<typeof StepInput>;
@@ -94,6 +97,7 @@ export const RouteStep = z.object({
   conditionBefore: z.string().nullable(),
   targetCondition: z.string().nullable(),
   toProve: z.array(ToProve),
+  ordering: OrderingAnswers,
   note: z.string().nullable(),
   /** Pieces that wait for it now. */
   waiting: z.int(),

@@ -110,6 +110,7 @@ const routeOf = (ctx: Ctx, partId: string) =>
       conditionBefore: routeSteps.conditionBefore,
       targetCondition: routeSteps.targetCondition,
       toProve: routeSteps.toProve,
+      ordering: routeSteps.ordering,
       note: routeSteps.note,
       waiting: sql<number>`(select coalesce(sum(b.pieces), 0)::int from lots l join balances b on b.lot_id = l.id where l.part_id = route_steps.part_id and b.place = 'making' and b.holder_id = route_steps.id)`,
       used: sql<boolean>`exists (select from movements m join lots l on l.id = m.lot_id where l.part_id = route_steps.part_id and route_steps.id in (m.to_holder_id, m.from_holder_id))

@@ -6,6 +6,7 @@ import { AppError } from '@/lib/errors';
 import { newId } from '@/lib/ids';
 
 import type { StepInput } from './contract';
+import { answersKept } from './ordering-answers';
 import { orNull } from './part-columns';
 import { PROCESS_WORDS } from '@/lib/trade/process';
 
@@ -84,5 +85,6 @@ const stepColumns = (step: StepInput, seq: number) => ({
   conditionBefore: orNull(step.conditionBefore),
   targetCondition: orNull(step.targetCondition),
   toProve: step.toProve,
+  ordering: answersKept(step.ordering),
   note: orNull(step.note),
 });

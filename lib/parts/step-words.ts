@@ -1,3 +1,4 @@
+import { statedItems, type OrderingAnswers } from './ordering-answers';
 import type { ToProve } from './to-prove';
 import { PROCESS_WORDS, type Process } from '@/lib/trade/process';
 
@@ -9,6 +10,7 @@ interface Step {
   conditionBefore: string | null;
   targetCondition: string | null;
   toProve: readonly ToProve[];
+  ordering: OrderingAnswers;
   note: string | null;
 }
 
@@ -22,6 +24,7 @@ export function stepWords(step: Step, at: number): string {
       .filter(Boolean)
       .join(' '),
   );
+  const stated = statedItems(step.ordering).map(({ item, says }) => `${item}: ${says}`);
   const parts = [
     `${at + 1} ${PROCESS_WORDS[step.process]}`,
     specification,
@@ -30,6 +33,7 @@ export function stepWords(step: Step, at: number): string {
     conditions,
     note,
     proofs.length > 0 ? `proves ${proofs.join('; ')}` : '',
+    stated.length > 0 ? `states ${stated.join('; ')}` : '',
   ];
   return parts.filter(Boolean).join(' ');
 }

@@ -8,6 +8,7 @@ import type { OrderContent } from '@/lib/travellers/content';
 
 import { COND, MONO } from './fonts';
 import { INK, QUIET, RULE, type } from './look';
+import { OrderStates } from './order-states';
 import { Asked, Cells, Heading, Paper } from './paper-parts';
 import { conditionWords, paperDay, paperMoment, workAsked } from './paper-words';
 
@@ -92,6 +93,9 @@ export function OrderDocument({ content, hash }: { content: OrderContent; hash: 
           <Sums content={content} />
         </View>
         {content.note && <Text style={{ ...type.text, marginTop: 6 }}>{content.note}</Text>}
+        {content.orderStates !== undefined && content.orderStates.length > 0 && (
+          <OrderStates states={content.orderStates} />
+        )}
         {content.requirements.length > 0 && (
           <View style={{ marginTop: 12 }}>
             <Heading title="Must be proved, on paper, by line" />

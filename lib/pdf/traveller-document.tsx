@@ -6,6 +6,7 @@ import type { TravellerContent } from '@/lib/travellers/content';
 
 import { COND, MONO } from './fonts';
 import { INK, type } from './look';
+import { OrderStates } from './order-states';
 import { Asked, Bulleted, Cells, contentWidth, Hand, Heading, Paper, TagHead } from './paper-parts';
 import { counted, paperDay, paperMoment, workAsked } from './paper-words';
 import { QrCode } from './qr-code';
@@ -47,6 +48,9 @@ export function TravellerDocument({
           <TravellerLines lines={lines} />
         </View>
         {content.note && <Text style={{ ...type.text, marginTop: 5 }}>{content.note}</Text>}
+        {content.orderStates !== undefined && content.orderStates.length > 0 && (
+          <OrderStates states={content.orderStates} />
+        )}
         <View style={{ flexDirection: 'row', marginTop: 8 }}>
           <View style={{ flexGrow: 1, flexBasis: 0, marginRight: 15 }}>
             <MustBeProved content={content} />

@@ -9,7 +9,11 @@ export type Paper = (typeof PAPERS)[number];
 
 const Party = z.object({ name: z.string(), address: z.array(z.string()), phone: z.string().nullable() });
 
-const ContentLine = FrozenLine.extend({ lineNo: z.int(), pieces: z.int(), loadNo: z.int().nullable() });
+const ContentLine = FrozenLine.omit({ ordering: true }).extend({
+  lineNo: z.int(),
+  pieces: z.int(),
+  loadNo: z.int().nullable(),
+});
 
 const ContentRequirement = z.object({
   /** The lines it holds for; none named: all. */
@@ -19,6 +23,15 @@ const ContentRequirement = z.object({
   unit: z.string(),
   source: z.string(),
 });
+
+/** What the order states beside limits: `colour: clear`. */
+const StatedForLines = z.object({
+  /** The lines it holds for; none named: all. */
+  lines: z.array(z.int()),
+  item: z.string(),
+  says: z.string(),
+});
+export type StatedForLines = z.infer<typeof StatedForLines>;
 
 /**
  * All that a batch's papers show, kept as it was stated: what is made from it again is the same to the byte. Later
@@ -40,6 +53,8 @@ const Stated = z.object({
   process: z.enum(PROCESSES),
   specification: z.string(),
   note: z.string().nullable(),
+  /** Contents from before this was asked have none. */
+  orderStates: z.array(StatedForLines).optional(),
   /** What is different from the version before, in words. */
   changes: z.array(z.string()),
 });

@@ -11,8 +11,9 @@ import { env } from '@/lib/env';
 import { notFound } from '@/lib/errors';
 
 import { cautionsOf } from './cautions';
-import { OVERRIDDEN_WORDS } from './overridden-words';
 import { paperOf, type OrderContent, type TravellerContent } from './content';
+import { orderStatesOf } from './order-states';
+import { OVERRIDDEN_WORDS } from './overridden-words';
 
 export interface Version {
   documentVersion: number;
@@ -48,6 +49,7 @@ export async function readPaperContents(
     process: batch.process,
     specification: specificationWords(batch),
     note: batch.note,
+    orderStates: orderStatesOf(lines),
     requirements: asked,
   };
   return {
@@ -55,7 +57,7 @@ export async function readPaperContents(
       kind: 'traveller',
       ...stated,
       ...copied(versions.traveller),
-      lines: lines.map(({ unitPriceMinor: _, ...line }) => line),
+      lines: lines.map(({ unitPriceMinor: _, ordering: __, ...line }) => line),
       cautions: cautionsOf(
         batch.process,
         lines.map(({ material }) => material),

@@ -1,0 +1,1 @@
+ALTER TABLE "route_steps" ADD COLUMN "ordering" jsonb DEFAULT '{}'::jsonb NOT NULL;
