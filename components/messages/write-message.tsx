@@ -38,7 +38,7 @@ export function WriteMessage({
 }: WriteMessageProps) {
   const { lines, other } = thread;
   return (
-    <div className="flex flex-col gap-2.5 pt-3">
+    <div className="no-print flex flex-col gap-2.5 pt-3">
       {answering && (
         <p className="border-l-4 border-l-dispatched pl-3 text-second [overflow-wrap:anywhere]">
           Answering {answering.author}: “{answering.body.slice(0, 160)}”{' '}
