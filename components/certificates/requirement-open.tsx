@@ -128,7 +128,7 @@ function Judge({ requirement, proving }: Omit<RequirementOpenProps, 'canEdit'>) 
   return (
     <div className="flex flex-wrap items-end gap-2">
       <TextField
-        className="min-w-40 flex-1"
+        className="max-w-md basis-full"
         label="The certificate states"
         mono
         data-key="e"
