@@ -118,7 +118,7 @@ const LETTERS_AT_ONCE = 240;
 function Changes({ entry }: { entry: AuditEntry }) {
   const changes = changesBetween(entry.before, entry.after);
   const lines = changes.map(({ field, before, after }) => (
-    <li key={field} className="break-words">
+    <li key={field} className="[overflow-wrap:anywhere]">
       <span className="text-quiet">{field}</span> {before !== null && <s className="text-quiet">{before}</s>}{' '}
       {after ?? 'none'}
     </li>
