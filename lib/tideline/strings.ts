@@ -6,7 +6,7 @@ import { xOf, type Scale } from './scale';
 /** The thread from a batch to the assembly that waits for it, or the words that say it is too late for a thread. */
 export interface TagString {
   fromX: number;
-  /** The knot, on the day of need; null where the need is before the end and only words are set. */
+  /** The knot, on the day of need; null where there is no room for it or the need is before the end: only words are set. */
   knotX: number | null;
   labelX: number;
   labelSide: 'right' | 'left';
@@ -45,10 +45,13 @@ export function stringOf(batch: TidelineBatch, endX: number, scale: Scale): TagS
   const right = knotX + GAP_PX;
   if (right + labelWidth <= scale.widthPx)
     return { ...common, knotX, labelX: right, labelSide: 'right', tooLate, endX: right + labelWidth };
+  const leftX = knotX - GAP_PX - labelWidth;
+  // The knot would lie in the words: they stand alone.
+  if (leftX < labelX) return { ...common, knotX: null, labelX, labelSide: 'right', tooLate, endX: labelEndX };
   return {
     ...common,
     knotX,
-    labelX: Math.max(labelX, knotX - GAP_PX - labelWidth),
+    labelX: leftX,
     labelSide: 'left',
     tooLate,
     endX: knotX + KNOT_PX,
