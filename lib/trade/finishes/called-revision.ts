@@ -33,17 +33,28 @@ export function coversRevision(revisions: Revisions, revision: string): boolean 
 /** What is typed after the number, if it begins with that number; spaces and dashes are typed in many ways. */
 function restOf(typed: string, document: string): string | null {
   const text = typed.toUpperCase();
-  const wanted = document.toUpperCase().replace(SEPARATORS, '');
+  const wanted = lettersOf(document);
   let at = 0;
   for (const letter of wanted) {
-    while (at < text.length && /[\s.‐–-]/.test(text.charAt(at))) at += 1;
+    while (SEPARATORS.has(text.charAt(at))) at += 1;
     if (text.charAt(at) !== letter) return null;
     at += 1;
   }
   return text.slice(at);
 }
 
-const SEPARATORS = /[\s.‐–-]/g;
+const SEPARATORS: ReadonlySet<string> = new Set([' ', '\t', '\u00a0', '.', '‐', '–', '-']);
+
+/** Documents are those of the tables, asked for again with every step. */
+const LETTERS = new Map<string, string>();
+
+function lettersOf(document: string): string {
+  const known = LETTERS.get(document);
+  if (known !== undefined) return known;
+  const letters = [...document.toUpperCase()].filter((letter) => !SEPARATORS.has(letter)).join('');
+  LETTERS.set(document, letters);
+  return letters;
+}
 
 /** `F`, `rev F`, `F Amdt 2`, `19`, `2019`. */
 function revisionIn(typed: string): string {

@@ -40,7 +40,7 @@ interface Point {
  */
 export function readBetween(table: HardnessTable, from: Column, value: number, to: Column): Reading {
   if (!Number.isFinite(value)) return { ok: false, reason: 'value_not_a_number' };
-  const points = pointsOf(table, from, to);
+  const { points, misprints } = columnsOf(table, from, to);
   const [softest] = points;
   const hardest = points.at(-1);
   if (!softest || !hardest) return { ok: false, reason: 'scale_not_in_table' };
@@ -50,8 +50,7 @@ export function readBetween(table: HardnessTable, from: Column, value: number, t
   const above = points.find((point) => point.at >= value - ON_A_ROW) ?? hardest;
   const isBetweenRows = Math.abs(above.at - value) > ON_A_ROW;
   const below = isBetweenRows ? (points[points.indexOf(above) - 1] ?? above) : above;
-  const misprints = [...rowsOutOfOrder(table, from), ...rowsOutOfOrder(table, to)];
-  if (misprints.some(({ row }) => row === above.row || row === below.row))
+  if (misprints.has(above.row) || misprints.has(below.row))
     return { ok: false, reason: 'row_out_of_order', source: above.source };
   if (!isBetweenRows)
     return {
@@ -71,6 +70,25 @@ export function readBetween(table: HardnessTable, from: Column, value: number, t
     isInBrackets: below.isInBrackets || above.isInBrackets,
     source: lessSure(below.source, above.source),
   };
+}
+
+interface Columns {
+  readonly points: readonly Point[];
+  readonly misprints: ReadonlySet<Point['row']>;
+}
+
+/** A route asks the same columns of the same table for every rule of every plated step. */
+const KNOWN = new WeakMap<HardnessTable, Map<string, Columns>>();
+
+function columnsOf(table: HardnessTable, from: Column, to: Column): Columns {
+  const known = KNOWN.get(table) ?? new Map<string, Columns>();
+  KNOWN.set(table, known);
+  const found = known.get(`${from} ${to}`);
+  if (found) return found;
+  const misprints = [...rowsOutOfOrder(table, from), ...rowsOutOfOrder(table, to)];
+  const columns = { points: pointsOf(table, from, to), misprints: new Set(misprints.map(({ row }) => row)) };
+  known.set(`${from} ${to}`, columns);
+  return columns;
 }
 
 /** Softest first. */
