@@ -85,6 +85,7 @@ const ANCHORS: Partial<Record<BatchFinding['waysOut'][number]['way'], string>> =
   set_days: '#terms',
   set_prices: '#lines',
   set_requirements: '#requirements',
+  set_loads: '#loads',
   choose_processor: '#terms',
 };
 

@@ -1,4 +1,7 @@
 import type { CalendarDay, Clock } from '@/lib/day-words';
+import type { TypedMaterial } from '@/lib/parts/material-of';
+import type { BatchTables } from '@/lib/reference/batch-tables';
+import type { Process } from '@/lib/trade/process';
 
 import type { Approval } from './approval';
 import type { Finding } from './finding';
@@ -14,10 +17,32 @@ export interface CheckFacts extends Clock {
     certificationFeeMinor: number;
     /** Requirements that hold for all lines. */
     requirements: number;
+    /** What they name: `Bake`, `Hardness`. */
+    characteristics: readonly string[];
   };
   today: CalendarDay;
   processor: { id: string; name: string; active: boolean; approvals: readonly Approval[] };
   lines: readonly CheckedLine[];
+  tables: BatchTables;
+}
+
+/** A step of the part's route, with the conditions that it changes. */
+export interface CheckedStep extends StepAsked {
+  id: string;
+  conditionBefore: string | null;
+  targetCondition: string | null;
+}
+
+/** What the rules of the trade ask of a part; measures in mm and g, null where the part does not say. */
+export interface CheckedPart extends TypedMaterial {
+  id: string;
+  madeCondition: string;
+  endCondition: string;
+  thicknessMm: number | null;
+  /** As typed: `0.040 in`. */
+  thickness: string | null;
+  /** Its outside steps in order. */
+  route: readonly CheckedStep[];
 }
 
 export interface CheckedLine {
@@ -27,9 +52,17 @@ export interface CheckedLine {
   partNumber: string;
   partRevision: string;
   partSuperseded: boolean;
-  step: StepAsked;
+  part: CheckedPart;
+  stepId: string;
+  step: CheckedStep;
+  pieces: number;
+  loadNo: number | null;
+  /** Solution treatments that pieces of the lot may have had outside before. */
+  solutionTreated: readonly Process[];
   unitPriceMinor: number;
   requirements: number;
+  /** What its requirements name. */
+  characteristics: readonly string[];
 }
 
 /** One question to a batch before it leaves: what is wrong, or in a few words what is right. */

@@ -1,21 +1,33 @@
 import type { Check, CheckFacts } from './check';
+import { hasReheatsLeft } from './clad-checks';
+import { canBeMade } from './condition-checks';
 import { CHECK_LEVELS, type Finding } from './finding';
 import { hasLines, isCurrent, isOneStep, isProvable } from './line-checks';
 import { hasDay, hasPrice, isTakenUp } from './order-checks';
+import { sharesLoads, soaksAndQuenches } from './load-checks';
 import { isApproved, isApprovedUntilBack, worksForUs } from './processor-checks';
+import { standsInOrder } from './route-checks';
+import { isInForce, meansWhatItSays } from './specification-checks';
 
-/** The order they are shown in within their level. Rules of the trade join this list with the trade library. */
+/** The order they are shown in within their level. */
 const CHECKS: readonly Check[] = [
   hasLines,
   worksForUs,
   isApproved,
   isOneStep,
+  canBeMade,
+  hasReheatsLeft,
+  standsInOrder,
+  sharesLoads,
   isApprovedUntilBack,
+  isInForce,
+  meansWhatItSays,
   isProvable,
   isCurrent,
   hasDay,
   hasPrice,
   isTakenUp,
+  soaksAndQuenches,
 ];
 
 export interface Checked {

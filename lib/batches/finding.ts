@@ -10,6 +10,7 @@ export const WAYS_OUT = [
   'set_days',
   'set_prices',
   'set_requirements',
+  'set_loads',
   'choose_processor',
   'see_processor',
   'take_up',

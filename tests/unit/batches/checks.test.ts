@@ -1,61 +1,19 @@
 import { expect, test } from 'vitest';
 
 import { approvalStanding, type Approval } from '@/lib/batches/approval';
-import { type CheckedLine, type CheckFacts } from '@/lib/batches/check';
+import type { CheckedLine } from '@/lib/batches/check';
 import { checkBatch } from '@/lib/batches/checks';
 import { canOverride } from '@/lib/batches/finding';
 
-const step = {
-  process: 'anodize',
-  specification: 'MIL-PRF-8625',
-  specificationRevision: 'F',
-  classType: 'type II class 1',
-} as const;
-const approval: Approval = {
-  reference: 'AP-7',
-  processes: ['anodize'],
-  specifications: [],
-  validFrom: '2026-01-01',
-  validTo: '2026-12-31',
-  withdrawnAt: null,
-};
-const line: CheckedLine = {
-  id: 'line-1',
-  lineNo: 1,
-  lotNumber: 'L-0001',
-  partNumber: 'P-1',
-  partRevision: 'A',
-  partSuperseded: false,
-  step,
-  unitPriceMinor: 500,
-  requirements: 2,
-};
+import { APPROVAL, factsOf, LINE, STEP } from './facts-of-batch';
 
-const facts = (
-  given: {
-    batch?: Partial<CheckFacts['batch']>;
-    processor?: Partial<CheckFacts['processor']>;
-    lines?: readonly CheckedLine[];
-  } = {},
-): CheckFacts => ({
-  zone: 'UTC',
-  now: new Date('2026-06-17T12:00:00Z'),
-  today: '2026-06-17',
-  batch: {
-    ...step,
-    number: 'B-0001',
-    wantedBackOn: '2026-07-01',
-    leavesOn: null,
-    putAsideAt: null,
-    lotMinimumMinor: 0,
-    certificationFeeMinor: 0,
-    requirements: 0,
-    ...given.batch,
-  },
-  processor: { id: 'processor-1', name: 'Ostrow', active: true, approvals: [approval], ...given.processor },
-  lines: given.lines ?? [line],
-});
-const codes = (given: Parameters<typeof facts>[0]) =>
+const step = STEP;
+const line = LINE;
+const approval: Approval = { ...APPROVAL, processes: ['anodize'] };
+
+type Given = Parameters<typeof factsOf>[1] & { lines?: readonly CheckedLine[] };
+const facts = ({ lines, ...given }: Given = {}) => factsOf(lines, given);
+const codes = (given: Given) =>
   checkBatch(facts(given)).findings.map((finding) => [finding.level, finding.code]);
 
 test('a batch with nothing wrong says what was looked at', () => {
@@ -95,7 +53,10 @@ test.each([
   ],
   [
     'a line whose route says another step',
-    { lines: [{ ...line, step: { ...step, specificationRevision: 'E' } }] },
+    {
+      batch: { specificationRevision: 'F' },
+      lines: [{ ...line, step: { ...step, specificationRevision: 'E' } }],
+    },
     'line_of_other_step',
   ],
 ] as const)('%s stops it', (_, given, code) => {

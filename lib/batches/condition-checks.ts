@@ -1,0 +1,120 @@
+import { materialOf, temperOf, type PartMaterial } from '@/lib/parts/material-of';
+import type { BatchTables } from '@/lib/reference/batch-tables';
+import type { Process } from '@/lib/trade/process';
+import type { WhyNot } from '@/lib/trade/tables/temper-transitions';
+import { explainCondition, type Reach } from '@/lib/trade/tempers/explain-condition';
+import type { Grounds } from '@/lib/trade/verdict';
+
+import type { Check, CheckedLine } from './check';
+import { OVERRIDE, type Finding } from './finding';
+import { materialWords } from './material-words';
+import { oncePerStep } from './once-per-step';
+import { sourceWords } from './source-words';
+
+const CHANGES_CONDITION: readonly Process[] = [
+  'solution_heat_treat_and_age',
+  'solution_heat_treat',
+  'artificial_age',
+  'anneal',
+];
+
+/** What a heat treater cannot make, only a mill; and what he makes under another name. */
+export const canBeMade: Check = {
+  met: 'a heat treater can make each condition',
+  look({ tables, lines }) {
+    const answer = oncePerStep((line) => answerOf(tables, line));
+    return lines.flatMap((line) => findingOf(line, answer(line)));
+  },
+};
+
+type Answer =
+  | { is: 'nothing' }
+  | { is: 'not_read'; what: string }
+  | ({ is: 'answered'; from: string; to: string } & Reach & Grounds);
+
+function answerOf(tables: BatchTables, { part, step }: CheckedLine): Answer {
+  if (!CHANGES_CONDITION.includes(step.process)) return { is: 'nothing' };
+  const found = materialOf(tables.material, part);
+  if (found.known === 'former_name')
+    return { is: 'not_read', what: `${part.alloy} is a former name, today ${found.formerly.alloy}` };
+  if (found.known === 'no') return { is: 'not_read', what: `No table here knows ${part.alloy}` };
+  if (found.material.family !== 'wrought_aluminium' || !step.targetCondition) return { is: 'nothing' };
+  return changeOf(tables, found.material, {
+    from: step.conditionBefore ?? part.madeCondition,
+    to: step.targetCondition,
+  });
+}
+
+function changeOf(
+  tables: BatchTables,
+  { alloy, form, clad }: PartMaterial,
+  typed: { from: string; to: string },
+): Answer {
+  const from = temperOf(tables.material.tempers, typed.from);
+  const to = temperOf(tables.material.tempers, typed.to);
+  if (!from || !to || !form)
+    return { is: 'not_read', what: `No table here knows condition ${from ? typed.to : typed.from}` };
+  const change = { material: { alloy, form, clad }, from, to };
+  const verdict = explainCondition(tables.conditions, change);
+  if (!verdict.ok) return { is: 'not_read', what: `No table here says how ${from} becomes ${to}` };
+  return { is: 'answered', ...verdict, from, to };
+}
+
+function findingOf(line: CheckedLine, answer: Answer): Finding[] {
+  if (answer.is === 'nothing') return [];
+  const subject = line.id;
+  if (answer.is === 'not_read')
+    return [
+      {
+        code: 'condition_not_read',
+        level: 'note',
+        subject,
+        sentence: `Line ${line.lineNo}: its condition is not checked.`,
+        rest: `${answer.what}; nothing is concluded.`,
+        waysOut: [],
+      },
+    ];
+  const { from, to } = answer;
+  const source = sourceWords(answer.source);
+  if (answer.reach === 'cannot_be_made')
+    return [
+      {
+        code: 'condition_not_made',
+        level: 'stop',
+        subject,
+        sentence: `Line ${line.lineNo} asks for ${to}, which no heat treater makes of ${from}.`,
+        rest: `${materialWords(wordsOf(line))}: ${WHY_NOT[answer.why]}${answer.gives ? `; trying gives ${answer.gives.condition}, whose allowables differ` : ''}.`,
+        source,
+        waysOut: [takeOut(line), OVERRIDE],
+      },
+    ];
+  if (answer.reach === 'made_under_other_name')
+    return [
+      {
+        code: 'condition_under_other_name',
+        level: 'warn',
+        subject,
+        sentence: `Line ${line.lineNo} asks for ${to}; made of ${from} it is called ${answer.properName}.`,
+        rest: `${to} is the mill's name. The allowables of ${answer.properName} differ: see that the drawing allows it.`,
+        source,
+        waysOut: [takeOut(line)],
+      },
+    ];
+  return [];
+}
+
+const wordsOf = ({ part: { alloy, clad, form } }: CheckedLine) =>
+  ({ alloy, clad, form: form || 'sheet' }) as const;
+
+const takeOut = ({ id, lineNo }: CheckedLine) =>
+  ({ way: 'take_out_line', says: `Take line ${lineNo} out`, lineId: id }) as const;
+
+const WHY_NOT: Record<WhyNot, string> = {
+  needs_mill_cold_work: 'it needs cold work between quench and ageing, which only a mill does',
+  needs_mill_stretch: 'it needs a stretch after the quench, which only a mill does',
+  ageing_gives_another_temper: 'ageing it gives another condition',
+  ageing_cannot_be_undone: 'ageing cannot be undone without a new solution treatment',
+  needs_re_solution: 'it has to be solution treated again first',
+  never_stable_at_room_temperature: 'the alloy never becomes stable at room temperature',
+  not_hardened_by_ageing: 'the alloy is not hardened by ageing',
+};

@@ -1,0 +1,100 @@
+import type { Check, CheckedLine, CheckFacts } from './check';
+import { APART_WORDS } from './apart-words';
+import type { Finding } from './finding';
+import { groupedBy } from './grouped-by';
+import { loadsOfBatch, type LoadsOfBatch } from './loads-of-batch';
+import { sourceWords } from './source-words';
+
+type Loads = LoadsOfBatch<CheckedLine>;
+
+/** Lines that a furnace load may hold together, where the lead set none; where one is set by hand, what is against it. */
+export const sharesLoads: Check = {
+  met: 'each load set by hand can be run',
+  look: ({ tables, lines }) =>
+    lines.some(({ loadNo }) => loadNo !== null) ? againstLoads(tables, lines) : howManyLoads(tables, lines),
+};
+
+function howManyLoads(tables: CheckFacts['tables'], lines: readonly CheckedLine[]): Finding[] {
+  const plan = loadsOfBatch(tables, lines);
+  if (!plan || plan.loads.length < 2) return [];
+  return [
+    {
+      code: 'several_loads',
+      level: 'note',
+      subject: '',
+      sentence: `It takes ${plan.loads.length} furnace loads${plan.method === 'exact' ? '' : ' or fewer'}.`,
+      rest: whyApart(plan),
+      ...sourceOf(plan),
+      waysOut: [{ way: 'set_loads', says: 'Set the loads' }],
+    },
+  ];
+}
+
+function againstLoads(tables: CheckFacts['tables'], lines: readonly CheckedLine[]): Finding[] {
+  const byLoad = groupedBy(
+    lines.filter(({ loadNo }) => loadNo !== null),
+    ({ loadNo }) => loadNo,
+  );
+  return [...byLoad].flatMap(([loadNo, together]) => {
+    const plan = loadsOfBatch(tables, together);
+    if (!plan || plan.loads.length < 2) return [];
+    return [
+      {
+        code: 'load_not_shared',
+        level: 'warn' as const,
+        subject: '',
+        sentence: `Load ${loadNo} cannot be one load.`,
+        rest: whyApart(plan),
+        ...sourceOf(plan),
+        waysOut: [{ way: 'set_loads' as const, says: 'Set the loads' }],
+      },
+    ];
+  });
+}
+
+/** The first pair stands for all; the plan beside the lines names each. */
+function whyApart({ apart }: Loads): string {
+  const [first] = apart;
+  if (!first) return '';
+  const [one, other] = first.between;
+  const more = apart.length > 1 ? ` The plan says so of ${apart.length} pairs.` : '';
+  return `${lineWords(one)} and ${lineWords(other)} are kept apart: ${APART_WORDS[first.reason]}.${more}`;
+}
+
+const NAMED = 4;
+
+function lineWords(lines: readonly CheckedLine[]): string {
+  const numbers = lines.slice(0, NAMED).map(({ lineNo }) => lineNo);
+  const more = lines.length > NAMED ? ` and ${lines.length - NAMED} more` : '';
+  return `${lines.length === 1 ? 'line' : 'lines'} ${numbers.join(', ')}${more}`;
+}
+
+function sourceOf({ apart }: Loads): Pick<Finding, 'source'> {
+  const [source] = apart[0]?.sources ?? [];
+  return source ? { source: sourceWords(source) } : {};
+}
+
+/** What the processor has to keep to, in the words in which the part says its thickness. */
+export const soaksAndQuenches: Check = {
+  met: 'no soak or quench delay to keep',
+  look({ tables, lines }) {
+    const plan = loadsOfBatch(tables, lines);
+    return (plan?.loads ?? []).flatMap((load, at): Finding[] => {
+      if (!load.solution) return [];
+      const { soakMin, longestMin } = load.solution;
+      const thickness = load.governing.part.thickness ?? `${load.governingMm} mm`;
+      const [source] = load.sources;
+      return [
+        {
+          code: 'soak_and_quench',
+          level: 'note',
+          subject: load.governing.id,
+          sentence: `${(plan?.loads.length ?? 0) > 1 ? `Load ${at + 1} of the plan soaks` : 'It soaks'} ${soakMin} min: ${thickness} governs.`,
+          rest: `${longestMin === null ? '' : `At most ${longestMin} min, for the clad. `}${load.maxDelayS === null ? '' : `Into the quench within ${load.maxDelayS} s.`}`.trim(),
+          ...(source && { source: sourceWords(source) }),
+          waysOut: [],
+        },
+      ];
+    });
+  },
+};

@@ -1,0 +1,93 @@
+import { dayWords } from '@/lib/day-words';
+import { readDesignation } from '@/lib/trade/finishes/read-designation';
+import { callOutFindings, type CallOutNote } from '@/lib/trade/lineage/call-out-findings';
+import { recogniseSpecification } from '@/lib/trade/lineage/recognise-specification';
+import type { LineageEventKind } from '@/lib/trade/lineage/lineage-event';
+import { standingOn } from '@/lib/trade/lineage/standing-on';
+import { successorsOf } from '@/lib/trade/lineage/successors-of';
+
+import type { Check, CheckFacts } from './check';
+import type { Finding } from './finding';
+import { sourceWords } from './source-words';
+
+/** The specification as the library writes it; null where it does not recognise one. */
+function calledOn({ batch }: CheckFacts): { number: string; revision: string | null } | null {
+  const found = recogniseSpecification(batch.specification);
+  return found && { number: found.number, revision: batch.specificationRevision ?? found.revision };
+}
+
+const ENDED: Partial<Record<LineageEventKind, string>> = {
+  superseded: 'was superseded',
+  withdrawn: 'was withdrawn',
+  cancelled: 'was cancelled',
+  renamed: 'was renamed',
+};
+
+export const isInForce: Check = {
+  met: 'no later document is known in place of the specification',
+  look(facts) {
+    const called = calledOn(facts);
+    if (!called) return [];
+    const { lineage } = facts.tables;
+    const standing = standingOn(lineage, called.number, { on: facts.today, by: 'publisher' });
+    const ended = standing.ok ? ENDED[standing.standing] : undefined;
+    if (!standing.ok || !ended) return [];
+    const next = successorsOf(lineage, called.number, 'parts');
+    // Then a later issue of the same document took over, and the order names its issue.
+    if (!next.ok && standing.revision !== null && standing.revision !== called.revision) return [];
+    const last = next.ok ? next.successors.filter((one) => one.last) : [];
+    const names = [...new Set(last.map(({ number }) => number))].join(' or ');
+    return [
+      {
+        code: 'specification_superseded',
+        level: 'warn',
+        subject: '',
+        sentence: `${called.number} ${ended} ${whenWords(standing.since, facts)}.`,
+        rest: names
+          ? `In its place stands ${names}. The drawing or contract decides which one is ordered.`
+          : 'What stands in its place is not recorded here. The drawing or contract decides what is ordered.',
+        source: sourceWords(standing.source),
+        waysOut: [],
+      },
+    ];
+  },
+};
+
+/** A date that may be known only to its year or month. */
+const whenWords = (since: string, facts: CheckFacts): string =>
+  since.length === 10 ? dayWords(since, facts) : `in ${since}`;
+
+const CALL_OUT_WORDS: Record<CallOutNote, string> = {
+  type_i_hexavalent_applies: 'No type is said, so Type I applies, with hexavalent chromium.',
+  nitric_unless_engineering_allows_citric: 'Nitric acid applies unless engineering allows citric.',
+  acceptance_class_4_applies: 'Acceptance class 4 applies.',
+  type_guidance_lost:
+    'The later document does not say which type goes with which steel: engineering has to say.',
+  excludes_parts: 'By its scope it is not for parts: engineering has to say what is.',
+  raw_material_only: 'It is for raw material, not for parts: engineering has to say what is.',
+  pulls_in_slash_sheet: 'The slash sheet for the steel applies with it.',
+  number_forks_by_product: 'Its number became several, by product: say which.',
+  classes_do_not_map: 'Its classes do not carry over to its successor: engineering has to say.',
+  not_over_200_ksi_unless_specified: 'It is not for steel over 200 ksi unless the order says so.',
+  no_sensitivity_level_in_first_issue: 'Its first issue has no sensitivity levels.',
+};
+
+export const meansWhatItSays: Check = {
+  met: 'the call-out leaves no doubt that is recorded',
+  look(facts) {
+    const called = calledOn(facts);
+    if (!called) return [];
+    const typeStated = readDesignation(facts.batch.classType ?? '').type !== undefined;
+    return callOutFindings(facts.tables.callOuts, { ...called, typeStated, forParts: true }).map(
+      ({ note, asksEngineering, source }): Finding => ({
+        code: `call_out_${note}`,
+        level: asksEngineering ? 'warn' : 'note',
+        subject: '',
+        sentence: `About ${called.number}:`,
+        rest: CALL_OUT_WORDS[note],
+        source: sourceWords(source),
+        waysOut: [],
+      }),
+    );
+  },
+};
