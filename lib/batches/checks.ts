@@ -4,7 +4,7 @@ import { canBeMade } from './condition-checks';
 import { CHECK_LEVELS, type Finding } from './finding';
 import { hasLines, isCurrent, isOneStep, isProvable } from './line-checks';
 import { hasDay, hasPrice, isTakenUp } from './order-checks';
-import { sharesLoads, soaksAndQuenches } from './load-checks';
+import { sharesLoads } from './load-checks';
 import { isApproved, isApprovedUntilBack, worksForUs } from './processor-checks';
 import { standsInOrder } from './route-checks';
 import { isInForce, meansWhatItSays } from './specification-checks';
@@ -27,7 +27,6 @@ const CHECKS: readonly Check[] = [
   hasDay,
   hasPrice,
   isTakenUp,
-  soaksAndQuenches,
 ];
 
 export interface Checked {

@@ -1,4 +1,4 @@
-import { materialOf, temperOf } from '@/lib/parts/material-of';
+import { temperOf } from '@/lib/parts/material-of';
 import type { BatchTables } from '@/lib/reference/batch-tables';
 import { calledRevision } from '@/lib/trade/finishes/called-revision';
 import { cladReheats, type ReheatStanding } from '@/lib/trade/heat-treat/clad-reheats';
@@ -6,6 +6,7 @@ import type { Grounds } from '@/lib/trade/verdict';
 
 import type { Check, CheckedLine } from './check';
 import { OVERRIDE, type Finding } from './finding';
+import { metalOf } from './metal-of';
 import { sourceWords } from './source-words';
 
 /** Every solution treatment drives the core's copper further through the cladding. */
@@ -23,7 +24,7 @@ type Standing = (ReheatStanding & Grounds) | 'thickness_not_stated';
 function standingOf(tables: BatchTables, { part, step, solutionTreated }: CheckedLine): Standing | null {
   if (step.process !== 'solution_heat_treat' && step.process !== 'solution_heat_treat_and_age') return null;
   if (!part.clad && !/cla/i.test(part.alloy)) return null;
-  const found = materialOf(tables.material, part);
+  const found = metalOf(tables, part);
   const boughtAs = temperOf(tables.material.tempers, part.madeCondition);
   if (found.known !== 'yes' || !found.material.clad || !boughtAs) return null;
   if (part.thicknessMm === null) return 'thickness_not_stated';

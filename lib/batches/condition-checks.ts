@@ -1,4 +1,4 @@
-import { materialOf, temperOf, type PartMaterial } from '@/lib/parts/material-of';
+import { temperOf, type PartMaterial } from '@/lib/parts/material-of';
 import type { BatchTables } from '@/lib/reference/batch-tables';
 import type { Process } from '@/lib/trade/process';
 import type { WhyNot } from '@/lib/trade/tables/temper-transitions';
@@ -7,6 +7,7 @@ import type { Grounds } from '@/lib/trade/verdict';
 
 import type { Check, CheckedLine } from './check';
 import { OVERRIDE, type Finding } from './finding';
+import { metalOf } from './metal-of';
 import { materialWords } from './material-words';
 import { oncePerStep } from './once-per-step';
 import { sourceWords } from './source-words';
@@ -34,9 +35,9 @@ type Answer =
 
 function answerOf(tables: BatchTables, { part, step }: CheckedLine): Answer {
   if (!CHANGES_CONDITION.includes(step.process)) return { is: 'nothing' };
-  const found = materialOf(tables.material, part);
+  const found = metalOf(tables, part);
   if (found.known === 'former_name')
-    return { is: 'not_read', what: `${part.alloy} is a former name, today ${found.formerly.alloy}` };
+    return { is: 'not_read', what: `${part.alloy} is a former name${todayWords(found.formerly.present)}` };
   if (found.known === 'no') return { is: 'not_read', what: `No table here knows ${part.alloy}` };
   if (found.material.family !== 'wrought_aluminium' || !step.targetCondition) return { is: 'nothing' };
   return changeOf(tables, found.material, {
@@ -44,6 +45,9 @@ function answerOf(tables: BatchTables, { part, step }: CheckedLine): Answer {
     to: step.targetCondition,
   });
 }
+
+const todayWords = (present: readonly string[]): string =>
+  present.length === 0 ? '' : `, today perhaps ${present.join(' or ')}, which is an engineering decision`;
 
 function changeOf(
   tables: BatchTables,

@@ -7,16 +7,22 @@ import { sourceWords } from './source-words';
 
 type Loads = LoadsOfBatch<CheckedLine>;
 
-/** Lines that a furnace load may hold together, where the lead set none; where one is set by hand, what is against it. */
+/**
+ * How many furnace loads it takes where the lead set none; what is against those that are set by hand; and what the
+ * processor has to keep to in each.
+ */
 export const sharesLoads: Check = {
-  met: 'each load set by hand can be run',
-  look: ({ tables, lines }) =>
-    lines.some(({ loadNo }) => loadNo !== null) ? againstLoads(tables, lines) : howManyLoads(tables, lines),
+  met: 'no furnace load to plan',
+  look({ tables, lines }) {
+    const plan = loadsOfBatch(tables, lines);
+    if (!plan) return [];
+    const isSet = lines.some(({ loadNo }) => loadNo !== null);
+    return [...(isSet ? againstLoads(tables, lines) : howManyLoads(plan)), ...soaksAndQuenches(plan)];
+  },
 };
 
-function howManyLoads(tables: CheckFacts['tables'], lines: readonly CheckedLine[]): Finding[] {
-  const plan = loadsOfBatch(tables, lines);
-  if (!plan || plan.loads.length < 2) return [];
+function howManyLoads(plan: Loads): Finding[] {
+  if (plan.loads.length < 2) return [];
   return [
     {
       code: 'several_loads',
@@ -74,27 +80,27 @@ function sourceOf({ apart }: Loads): Pick<Finding, 'source'> {
   return source ? { source: sourceWords(source) } : {};
 }
 
-/** What the processor has to keep to, in the words in which the part says its thickness. */
-export const soaksAndQuenches: Check = {
-  met: 'no soak or quench delay to keep',
-  look({ tables, lines }) {
-    const plan = loadsOfBatch(tables, lines);
-    return (plan?.loads ?? []).flatMap((load, at): Finding[] => {
-      if (!load.solution) return [];
-      const { soakMin, longestMin } = load.solution;
-      const thickness = load.governing.part.thickness ?? `${load.governingMm} mm`;
-      const [source] = load.sources;
-      return [
-        {
-          code: 'soak_and_quench',
-          level: 'note',
-          subject: load.governing.id,
-          sentence: `${(plan?.loads.length ?? 0) > 1 ? `Load ${at + 1} of the plan soaks` : 'It soaks'} ${soakMin} min: ${thickness} governs.`,
-          rest: `${longestMin === null ? '' : `At most ${longestMin} min, for the clad. `}${load.maxDelayS === null ? '' : `Into the quench within ${load.maxDelayS} s.`}`.trim(),
-          ...(source && { source: sourceWords(source) }),
-          waysOut: [],
-        },
-      ];
-    });
-  },
-};
+/** In the words in which the part says its thickness. */
+function soaksAndQuenches({ loads }: Loads): Finding[] {
+  return loads.flatMap((load, at): Finding[] => {
+    if (!load.solution) return [];
+    const { soakMin, longestMin } = load.solution;
+    const thickness = load.governing.part.thickness ?? `${load.governingMm} mm`;
+    const [source] = load.sources;
+    const rest = [
+      longestMin === null ? '' : `At most ${longestMin} min, for the clad.`,
+      load.maxDelayS === null ? '' : `Into the quench within ${load.maxDelayS} s.`,
+    ];
+    return [
+      {
+        code: 'soak_and_quench',
+        level: 'note',
+        subject: load.governing.id,
+        sentence: `${loads.length > 1 ? `Load ${at + 1} of the plan soaks` : 'It soaks'} ${soakMin} min: ${thickness} governs.`,
+        rest: rest.filter(Boolean).join(' '),
+        ...(source && { source: sourceWords(source) }),
+        waysOut: [],
+      },
+    ];
+  });
+}

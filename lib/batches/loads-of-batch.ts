@@ -1,4 +1,4 @@
-import { materialOf, temperOf } from '@/lib/parts/material-of';
+import { temperOf } from '@/lib/parts/material-of';
 import type { BatchTables } from '@/lib/reference/batch-tables';
 import type { LoadGroup, LoadProcess } from '@/lib/trade/heat-treat/load-needs';
 import { planLoads, type KeptApart, type LoadPlan, type PlannedLoad } from '@/lib/trade/heat-treat/load-plan';
@@ -7,6 +7,7 @@ import { celsiusDifferenceFromFahrenheit } from '@/lib/trade/units/temperature';
 
 import type { CheckedLine } from './check';
 import { groupedBy } from './grouped-by';
+import { metalOf } from './metal-of';
 
 /** ±10 °F, as FAA-H-8083-30 has metal held in a furnace. */
 const UNIFORMITY_C = celsiusDifferenceFromFahrenheit(10);
@@ -74,7 +75,7 @@ function inOrder<Line>(all: readonly Line[], some: readonly Line[]): Line[] {
 }
 
 function groupOf(tables: BatchTables, { stepId, part, step }: LoadLine): LoadGroup[] {
-  const found = materialOf(tables.material, part);
+  const found = metalOf(tables, part);
   const { process } = step;
   if (found.known !== 'yes' || !isLoadProcess(process) || part.thicknessMm === null) return [];
   const { alloy, family, form, clad } = found.material;

@@ -1,11 +1,15 @@
 import type { CheckedLine } from './check';
 
-/** Lines of one part at one step ask the same: answered once for all of them, however many lines there are. */
-export function oncePerStep<Answer>(answer: (line: CheckedLine) => Answer): (line: CheckedLine) => Answer {
+/** Lines that ask the same are answered once, however many there are: lines of one part at one step, if nothing else is said. */
+export function oncePerStep<Answer>(
+  answer: (line: CheckedLine) => Answer,
+  sameFor: (line: CheckedLine) => string = ({ stepId }) => stepId,
+): (line: CheckedLine) => Answer {
   const known = new Map<string, { answer: Answer }>();
   return (line) => {
-    const found = known.get(line.stepId) ?? { answer: answer(line) };
-    known.set(line.stepId, found);
+    const key = sameFor(line);
+    const found = known.get(key) ?? { answer: answer(line) };
+    known.set(key, found);
     return found.answer;
   };
 }

@@ -1,4 +1,3 @@
-import { materialOf } from '@/lib/parts/material-of';
 import { routePartOf } from '@/lib/parts/route-part-of';
 import type { BatchTables } from '@/lib/reference/batch-tables';
 import { checkRoute } from '@/lib/trade/route/check-route';
@@ -6,6 +5,7 @@ import type { RouteFinding } from '@/lib/trade/route/route';
 
 import type { Check, CheckedLine, CheckFacts } from './check';
 import { OVERRIDE, type Finding } from './finding';
+import { metalOf } from './metal-of';
 import { oncePerStep } from './once-per-step';
 import { ROUTE_RULE_WORDS } from './route-rule-words';
 import { sourceWords } from './source-words';
@@ -14,7 +14,7 @@ import { sourceWords } from './source-words';
 export const standsInOrder: Check = {
   met: 'the step stands where it belongs in each route',
   look({ tables, lines, batch }) {
-    const answer = oncePerStep((line) => aboutThisStep(tables, line));
+    const answer = oncePerStep((line) => aboutThisStep(tables, line), routeOf);
     const warned = new Map<string, { finding: RouteFinding; lines: CheckedLine[] }>();
     const stops: Finding[] = [];
     for (const line of lines)
@@ -32,7 +32,7 @@ export const standsInOrder: Check = {
 };
 
 function aboutThisStep(tables: BatchTables, { part, stepId }: CheckedLine): RouteFinding[] {
-  const found = materialOf(tables.material, part);
+  const found = metalOf(tables, part);
   const at = part.route.findIndex(({ id }) => id === stepId);
   if (found.known !== 'yes') return [];
   const route = part.route.map(({ specificationRevision, ...step }) => ({
@@ -44,6 +44,16 @@ function aboutThisStep(tables: BatchTables, { part, stepId }: CheckedLine): Rout
     ({ severity, steps }) => severity !== 'note' && steps.includes(at),
   );
 }
+
+/** All that the rules look at: parts of one metal with one route are asked about once. */
+const routeOf = ({ part: { alloy, form, clad, endCondition, route }, stepId }: CheckedLine): string =>
+  JSON.stringify([
+    ...[alloy, form, clad, endCondition],
+    route.map((step) => [
+      ...[step.process, step.specification, step.specificationRevision, step.classType],
+      ...[step.conditionBefore, step.targetCondition, step.id === stepId],
+    ]),
+  ]);
 
 /** Platers bake what they plate: then the order asks for it with the plating, and the route has no step of its own. */
 const asksForBake = (batch: CheckFacts['batch'], line: CheckedLine): boolean =>
