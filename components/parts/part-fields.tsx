@@ -1,10 +1,13 @@
 'use client';
 
-import { useFormContext } from 'react-hook-form';
+import { useFormContext, useWatch } from 'react-hook-form';
 import { Checkbox } from '@/components/ui/choice';
 import { SelectField, TextArea, TextField } from '@/components/ui/field';
 import { Section } from '@/components/ui/section';
 import { PRODUCT_FORMS } from '@/lib/trade/process';
+import { AlloyAdvice } from './alloy-advice';
+import { ComputedSize } from './computed-size';
+import { ConditionAdvice, ConditionList } from './condition-advice';
 import type { PartValues } from './part-form-values';
 
 interface Frozen {
@@ -14,8 +17,9 @@ interface Frozen {
 }
 
 export function IdentityFields({ frozen }: { frozen: Frozen }) {
-  const { register, formState } = useFormContext<PartValues>();
+  const { register, formState, control } = useFormContext<PartValues>();
   const { errors } = formState;
+  const [made, end] = useWatch({ control, name: ['madeCondition', 'endCondition'] });
   return (
     <Section title="The part">
       <div className="grid grid-cols-6 gap-x-4 gap-y-3 py-2 max-md:grid-cols-2">
@@ -74,6 +78,7 @@ export function IdentityFields({ frozen }: { frozen: Frozen }) {
           hint="O"
           autoComplete="off"
           error={errors.madeCondition?.message}
+          list="conditions-made"
           {...register('madeCondition')}
         />
         <TextField
@@ -82,9 +87,14 @@ export function IdentityFields({ frozen }: { frozen: Frozen }) {
           hint="T42"
           autoComplete="off"
           error={errors.endCondition?.message}
+          list="conditions-end"
           {...register('endCondition')}
         />
       </div>
+      <ConditionList id="conditions-made" />
+      <ConditionList id="conditions-end" after={made} />
+      <AlloyAdvice />
+      <ConditionAdvice from={made} to={end} maker="route" />
       <div className="flex flex-wrap items-center gap-x-9">
         <Checkbox says="Clad" note="both faces or one" {...register('clad')} />
         {frozen.serialised === undefined ? (
@@ -126,6 +136,7 @@ export function SizeFields() {
           />
         ))}
       </div>
+      <ComputedSize />
     </Section>
   );
 }

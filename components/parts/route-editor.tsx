@@ -1,20 +1,25 @@
 'use client';
 
-import { useFieldArray, useFormContext } from 'react-hook-form';
+import { useFieldArray, useFormContext, useWatch } from 'react-hook-form';
 import { Button } from '@/components/ui/button';
 import { Empty } from '@/components/ui/empty';
 import { FieldError, SelectField, TextField } from '@/components/ui/field';
 import { Section } from '@/components/ui/section';
 import { PROCESS_WORDS, PROCESSES } from '@/lib/trade/process';
 import { EMPTY_STEP, type PartValues } from './part-form-values';
+import { ConditionAdvice, ConditionList } from './condition-advice';
+import { OrderingEditor } from './ordering-editor';
 import { ProofEditor } from './proof-editor';
+import { RouteFindings } from './route-findings';
+import { SpecificationAdvice } from './specification-advice';
+import { conditionBefore, useTypedRoute } from './use-typed-part';
 
 const PROCESS_OPTIONS = PROCESSES.map((value) => ({ value, says: PROCESS_WORDS[value] }));
 
 /** The outside steps in their order; what each must prove stands under it. */
 export function RouteEditor({ usedSteps }: { usedSteps: readonly string[] }) {
   const { control, formState } = useFormContext<PartValues>();
-  const { fields, append, remove, swap } = useFieldArray({ control, name: 'route', keyName: 'key' });
+  const { fields, append, remove, swap, replace } = useFieldArray({ control, name: 'route', keyName: 'key' });
   const fault = formState.errors.route?.message ?? formState.errors.route?.root?.message;
   return (
     <Section title="Outside steps" note="in the order the pieces take them">
@@ -38,6 +43,7 @@ export function RouteEditor({ usedSteps }: { usedSteps: readonly string[] }) {
           />
         ))}
       </ol>
+      <RouteFindings onTake={replace} />
       <div className="pt-3">
         <Button size="small" onClick={() => append(EMPTY_STEP)}>
           Add a step
@@ -57,7 +63,10 @@ interface StepFieldsProps {
 }
 
 function StepFields({ at, isLast, isUsed, onUp, onDown, onRemove }: StepFieldsProps) {
-  const { register, formState } = useFormContext<PartValues>();
+  const { register, formState, control } = useFormContext<PartValues>();
+  const made = useWatch({ control, name: 'madeCondition' });
+  const route = useTypedRoute();
+  const before = conditionBefore(route, at, made);
   const errors = formState.errors.route?.[at];
   const step = at + 1;
   return (
@@ -123,6 +132,7 @@ function StepFields({ at, isLast, isUsed, onUp, onDown, onRemove }: StepFieldsPr
             mono
             autoComplete="off"
             error={errors?.conditionBefore?.message}
+            list="conditions-made"
             {...register(`route.${at}.conditionBefore`)}
           />
           <TextField
@@ -130,6 +140,7 @@ function StepFields({ at, isLast, isUsed, onUp, onDown, onRemove }: StepFieldsPr
             mono
             autoComplete="off"
             error={errors?.targetCondition?.message}
+            list={`conditions-after-${at}`}
             {...register(`route.${at}.targetCondition`)}
           />
           <TextField
@@ -140,8 +151,19 @@ function StepFields({ at, isLast, isUsed, onUp, onDown, onRemove }: StepFieldsPr
             {...register(`route.${at}.note`)}
           />
         </div>
+        <ConditionList id={`conditions-after-${at}`} after={before} />
+        <SpecificationAdvice at={at} />
+        {changesCondition(route[at]?.process) && (
+          <ConditionAdvice from={before} to={route[at]?.targetCondition ?? ''} maker="step" />
+        )}
+        <OrderingEditor at={at} />
         <ProofEditor step={at} />
       </fieldset>
     </li>
   );
 }
+
+/** Only a heat treatment makes a condition; another step just says in which one the pieces are. */
+const changesCondition = (process: string | undefined): boolean =>
+  process !== undefined && HEAT_TREATMENTS.some((one) => one === process);
+const HEAT_TREATMENTS = ['solution_heat_treat_and_age', 'solution_heat_treat', 'artificial_age', 'anneal'];

@@ -73,6 +73,22 @@ test('a part is kept as it was typed, with its measures in SI, and the audit tel
   expect(audit).toEqual([{ action: 'part.create' }]);
 });
 
+test('what the order states is kept with its step, goes on to the next revision, and blanks are not kept', async () => {
+  const { as } = await world();
+  const ordering = { part_type: ' pressed web ', restrictions: '' };
+  const { id } = await as(['lead'], (ctx) => createPart(ctx, rib({ route: [{ ...STEP, ordering }] })));
+  const part = await as(['lead'], (ctx) => getPart(ctx, { partId: id }));
+  expect(part.route[0]?.ordering).toEqual({ part_type: 'pressed web' });
+  const next = await as(['lead'], (ctx) =>
+    revisePart(ctx, {
+      ...rib({ revision: 'D', route: [{ ...STEP, ordering: part.route[0]?.ordering }] }),
+      partId: id,
+    }),
+  );
+  const revised = await as(['lead'], (ctx) => getPart(ctx, { partId: next.id }));
+  expect(revised.route[0]?.ordering).toEqual({ part_type: 'pressed web' });
+});
+
 test('only a lead or an admin changes parts; everybody in the shop reads them', async () => {
   const { as } = await world();
   await expect(as(['inspector', 'office'], (ctx) => createPart(ctx, rib()))).rejects.toMatchObject({
@@ -125,7 +141,14 @@ test('a new revision supersedes the old, and old lots keep theirs', async () => 
     revisePart(ctx, {
       ...rib({ revision: 'D', thickness: '0.040 in' }),
       partId: id,
-      route: before.route.map((step) => ({ ...STEP, id: step.id, classType: '', note: '', toProve: [] })),
+      route: before.route.map((step) => ({
+        ...STEP,
+        id: step.id,
+        classType: '',
+        note: '',
+        toProve: [],
+        ordering: {},
+      })),
     }),
   );
 

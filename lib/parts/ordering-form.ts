@@ -1,0 +1,73 @@
+import type { PartTables } from '@/lib/reference/published-tables';
+import { recogniseSpecification } from '@/lib/trade/lineage/recognise-specification';
+import { missingItems } from '@/lib/trade/ordering/missing-items';
+import type { OrderFact, OrderItem } from '@/lib/trade/ordering/order-item';
+import { orderingChecklist, type ChecklistItem } from '@/lib/trade/ordering/ordering-checklist';
+
+import { statedItems, type OrderingAnswers } from './ordering-answers';
+
+/** What the part, the batch and the step itself put on every order; nobody types it twice. */
+const STATED_ELSEWHERE: readonly OrderItem[] = [
+  'specification_and_revision',
+  'quantity',
+  'part_number',
+  'alloy',
+  'product_form',
+];
+
+export interface OrderedStep {
+  readonly specification: string;
+  readonly specificationRevision: string;
+  readonly classType: string;
+  readonly conditionBefore: string;
+  readonly targetCondition: string;
+  readonly ordering: OrderingAnswers;
+}
+
+export interface OrderingForm {
+  /** What is asked beside the fields of the step. */
+  readonly asked: readonly ChecklistItem[];
+  /** Has to be asked for before the work starts; commonest first. */
+  readonly missing: readonly ChecklistItem[];
+}
+
+/** What an order of a step must state, and what it still leaves out. Null where nothing is recorded for its specification. */
+export function orderingForm(
+  { ordering, commonlyMissing }: Pick<PartTables, 'ordering' | 'commonlyMissing'>,
+  step: OrderedStep,
+): OrderingForm | null {
+  const read = recogniseSpecification(step.specification);
+  if (!read) return null;
+  const facts = factsOf(step.classType);
+  const checklist = orderingChecklist(ordering, read.number, facts);
+  if (!checklist.ok) return null;
+  const elsewhere = new Set([...STATED_ELSEWHERE, ...saidByFields(step)]);
+  const stated = [...elsewhere, ...statedItems(step.ordering).map(({ id }) => id)];
+  const open = missingItems({ ordering, commonest: commonlyMissing }, read.number, { stated, facts });
+  return {
+    asked: checklist.items.filter(({ item }) => !elsewhere.has(item)),
+    missing: open.ok ? open.missing : [],
+  };
+}
+
+function saidByFields({ classType, conditionBefore, targetCondition }: OrderedStep): OrderItem[] {
+  const says = (item: OrderItem, word: RegExp): OrderItem[] => (word.test(classType) ? [item] : []);
+  return [
+    ...says('type', /\btype\b/i),
+    ...says('class', /\bclass\b/i),
+    ...says('grade', /\bgrade\b/i),
+    ...says('method', /\bmethod\b/i),
+    ...says('sensitivity', /\blevel\b/i),
+    ...(conditionBefore === '' ? [] : (['condition_before'] as const)),
+    ...(targetCondition === '' ? [] : (['condition_after'] as const)),
+  ];
+}
+
+function factsOf(classType: string): OrderFact[] {
+  const is = (fact: OrderFact, word: RegExp): OrderFact[] => (word.test(classType) ? [fact] : []);
+  return [
+    ...is('class_2', /\bclass\s*2\b/i),
+    ...is('class_3', /\bclass\s*3\b/i),
+    ...is('type_iii', /\btype\s*(?:iii|3)\b/i),
+  ];
+}
