@@ -1,7 +1,7 @@
 import type { Source } from '@/lib/trade/source';
 import type { TableReference } from '@/lib/trade/table';
 
-const HOW: Record<Source['confidence'], string> = {
+export const HOW_FOUND: Record<Source['confidence'], string> = {
   read: 'read in the source',
   'read+memory': 'partly read, partly from memory',
   computed: 'worked out from the published rule',
@@ -12,7 +12,7 @@ const HOW: Record<Source['confidence'], string> = {
 export function SourceLine({ source, readFrom }: { source: Source; readFrom?: TableReference | undefined }) {
   return (
     <p className="pt-2 text-source text-quiet">
-      {source.document}; {HOW[source.confidence]}; {source.certainty} trust.
+      {source.document}; {HOW_FOUND[source.confidence]}; {source.certainty} trust.
       {readFrom && !source.document.includes(readFrom.edition) && ` Table: ${readFrom.edition}.`}
       {source.address !== undefined && ` Seen at ${source.address}.`}
     </p>

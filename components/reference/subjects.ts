@@ -2,6 +2,18 @@
 export const SUBJECTS = {
   fit: 'Fit in a tank or furnace',
   soak: 'Soak and quench delay',
+  load: 'What may share a load',
+  holding: 'As-quenched time',
+  clad: 'Clad re-treatments',
+  temper: 'Which temper from which',
+  hardness: 'Hardness conversion',
+  acceptance: 'Hardness and conductivity',
+  finish: 'Build-up of a finish',
+  bake: 'Bake after plating',
+  samples: 'Samples to take',
+  mass: 'Mass and area',
+  steel: 'Steel windows',
+  colours: 'Oxide colours of steel',
 } as const;
 
 export type Subject = keyof typeof SUBJECTS;

@@ -1,7 +1,14 @@
 'use client';
 import { useEffect, useState } from 'react';
 
-import { benchText, readBench, unitWord, type BenchKind, type BenchUnits } from './bench-units';
+import {
+  benchText,
+  readBench,
+  unitWord,
+  type BenchKind,
+  type BenchUnits,
+  type MeasureKind,
+} from './bench-units';
 
 /** How long a person pauses before the address follows what was typed. */
 const ADDRESS_AFTER_MS = 400;
@@ -18,10 +25,10 @@ export interface Bench<Name extends string> {
   field: (name: Name) => { value: string; unit: string | undefined; onChange: (event: Changed) => void };
   /** The same for a field that is chosen from a list. */
   choice: (name: Name) => { value: string; onChange: (event: Changed) => void };
-  /** The measure in mm or °C, a number as it is; null where it cannot be read. */
+  /** The measure in mm, °C or MPa, a number as it is; null where it cannot be read. */
   read: (name: Name) => number | null;
-  /** A length in mm or a temperature in °C, as it is written in the units chosen, with its unit. */
-  says: (value: number, kind: 'length' | 'temperature') => string;
+  /** A length in mm, a temperature in °C or a stress in MPa, as it is written in the units chosen, with its unit. */
+  says: (value: number, kind: MeasureKind) => string;
   set: (values: Partial<Record<Name, string>>) => void;
 }
 type Changed = { currentTarget: { value: string } };
