@@ -46,6 +46,7 @@ export async function dispatches(
         conditionBefore: 'O',
         targetCondition: 'T42',
         note: '',
+        ordering: {},
         toProve: [
           {
             characteristic: 'Hardness',

@@ -9,10 +9,7 @@ const isSlip = (rule: string, html: string): boolean => rule === 'target-size' &
 
 /** Nothing that keeps a person from using the page: axe's serious and critical findings, and no sideways scrolling. */
 export async function looksRight(page: Page, name: string): Promise<void> {
-  await page.waitForLoadState('load');
-  // What sticks to the foot of the window must not lie over what is looked at.
-  await page.evaluate(() => window.scrollTo(0, 0));
-  await page.screenshot({ path: `test-results/screens/${name}.png`, fullPage: true });
+  await fitsTheWindow(page, name);
   const { violations } = await new AxeBuilder({ page })
     .withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'])
     .analyze();
@@ -29,6 +26,14 @@ export async function looksRight(page: Page, name: string): Promise<void> {
       `${name}: what axe finds serious`,
     )
     .toEqual([]);
+}
+
+/** Keeps a picture of the page and sees that it does not scroll sideways. */
+export async function fitsTheWindow(page: Page, name: string): Promise<void> {
+  await page.waitForLoadState('load');
+  // What sticks to the foot of the window must not lie over what is looked at.
+  await page.evaluate(() => window.scrollTo(0, 0));
+  await page.screenshot({ path: `test-results/screens/${name}.png`, fullPage: true });
   const overflow = await page.evaluate(
     () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
   );
