@@ -1,3 +1,4 @@
+import Link from 'next/link';
 import type { ReactNode } from 'react';
 
 import { PublicHead } from '@/components/shell/public-head';
@@ -17,7 +18,9 @@ export function PublicPage({ tag, title, lead, children }: PublicPageProps) {
   return (
     <>
       <SkipLink />
-      <PublicHead />
+      <PublicHead>
+        <Link href="/reference">Bench reference</Link>
+      </PublicHead>
       <main id="page" tabIndex={-1} className="lw-page px-6 pb-9 max-md:px-4">
         <div className="mx-auto w-full max-w-[27rem] pt-12 max-md:pt-6">
           {tag && <div className="pb-3">{tag}</div>}

@@ -10,6 +10,7 @@ import { HardnessCalculator } from './hardness-calculator';
 import { HoldingCalculator } from './holding-calculator';
 import { LoadCalculator } from './load-calculator';
 import { MassCalculator } from './mass-calculator';
+import { PyrometryCalculator } from './pyrometry-calculator';
 import { SampleCalculator } from './sample-calculator';
 import { SoakCalculator } from './soak-calculator';
 import { SteelCalculator } from './steel-calculator';
@@ -31,5 +32,6 @@ export const CALCULATORS: Record<Subject, ComponentType<{ given: Given }>> = {
   samples: SampleCalculator,
   mass: MassCalculator,
   steel: SteelCalculator,
+  pyrometry: PyrometryCalculator,
   colours: ColourCalculator,
 };

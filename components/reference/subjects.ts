@@ -13,6 +13,7 @@ export const SUBJECTS = {
   samples: 'Samples to take',
   mass: 'Mass and area',
   steel: 'Steel windows',
+  pyrometry: 'Pyrometry',
   colours: 'Oxide colours of steel',
 } as const;
 
