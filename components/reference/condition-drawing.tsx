@@ -8,7 +8,7 @@ import type { ReachableCondition } from '@/lib/trade/tempers/reachable-condition
 const WIDTH = 720;
 const BOX = { width: 62, height: 28 };
 const LINE = 46;
-const MOST_ACROSS = 260;
+const MOST_ACROSS = 340;
 
 interface ConditionDrawingProps {
   from: Temper;
