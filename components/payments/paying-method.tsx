@@ -19,14 +19,12 @@ export function PayingMethod({ justSaved }: { justSaved: boolean }) {
   );
   const link = useWrite(linkPayingMethod);
   const open = async () => {
-    const page = await link
-      .mutateAsync({})
-      .catch((problem: unknown) =>
-        showMessage({
-          says: problem instanceof Error ? problem.message : 'The page could not be opened.',
-          failed: true,
-        }),
-      );
+    const page = await link.mutateAsync({}).catch((problem: unknown) =>
+      showMessage({
+        says: problem instanceof Error ? problem.message : 'The page could not be opened.',
+        failed: true,
+      }),
+    );
     if (page) window.location.assign(page.url);
   };
   return (

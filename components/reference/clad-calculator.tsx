@@ -1,11 +1,7 @@
 'use client';
 import { NumberInput, SelectField } from '@/components/ui/field';
 import { cladReheats, type ReheatStanding } from '@/lib/trade/heat-treat/clad-reheats';
-import {
-  CLAD_REHEATS_MIL,
-  CLAD_REHEATS_TO,
-  CLAD_TREATMENTS_AMS,
-} from '@/lib/trade/tables/clad-reheats';
+import { CLAD_REHEATS_MIL, CLAD_REHEATS_TO, CLAD_TREATMENTS_AMS } from '@/lib/trade/tables/clad-reheats';
 import { TEMPERS } from '@/lib/trade/tempers/temper';
 
 import { Answer, NoAnswer } from './answer';
@@ -51,7 +47,12 @@ export function CladCalculator({ given }: { given: Given }) {
         />
         <SelectField label="Bought as" options={optionsSaying(TEMPERS)} {...bench.choice('bought')} />
         <NumberInput label="Treated since" hint="solution treatments" {...bench.field('done')} />
-        <SelectField label="By" className="wide" options={optionsOf(DOCUMENTS)} {...bench.choice('document')} />
+        <SelectField
+          label="By"
+          className="wide"
+          options={optionsOf(DOCUMENTS)}
+          {...bench.choice('document')}
+        />
       </BenchFieldRow>
       <Clad bench={bench} />
       {Object.values(TABLES).map((table) => (

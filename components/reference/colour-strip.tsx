@@ -30,7 +30,12 @@ interface ColourStripProps {
 /** The colours of one list along the temperature, as a strip. */
 export function ColourStrip({ rows, units, atC }: ColourStripProps) {
   const shown = (atF: number) => Math.round(inUnits(celsiusFromFahrenheit(atF), 'temperature', units));
-  const axis = { from: shown(FROM_F), to: shown(TO_F), ticks: ticksOf(shown(FROM_F), shown(TO_F), 8), says: '' };
+  const axis = {
+    from: shown(FROM_F),
+    to: shown(TO_F),
+    ticks: ticksOf(shown(FROM_F), shown(TO_F), 8),
+    says: '',
+  };
   const across = placeOf(axis, [2, WIDTH - 2]);
   const asked = atC === null ? null : inUnits(atC, 'temperature', units);
   const isDrawn = asked !== null && asked >= axis.from && asked <= axis.to;
@@ -68,13 +73,7 @@ export function ColourStrip({ rows, units, atC }: ColourStripProps) {
             </text>
           </g>
         ))}
-        {isDrawn && (
-          <path
-            d={`M${across(asked).toFixed(1)} 2V50`}
-            stroke="var(--paper)"
-            strokeWidth="5"
-          />
-        )}
+        {isDrawn && <path d={`M${across(asked).toFixed(1)} 2V50`} stroke="var(--paper)" strokeWidth="5" />}
         {isDrawn && <path d={`M${across(asked).toFixed(1)} 2V50`} stroke="var(--ink)" strokeWidth="2" />}
       </svg>
     </div>

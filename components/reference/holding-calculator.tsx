@@ -36,7 +36,12 @@ export function HoldingCalculator({ given }: { given: Given }) {
         <SelectField label="Alloy" options={optionsSaying(HELD)} {...bench.choice('alloy')} />
         <TextField label="Quenched" type="datetime-local" className="wide" {...bench.choice('quenched')} />
         <TextField label="Into the cold" type="datetime-local" className="wide" {...bench.choice('putIn')} />
-        <TextField label="Out of the cold" type="datetime-local" className="wide" {...bench.choice('takenOut')} />
+        <TextField
+          label="Out of the cold"
+          type="datetime-local"
+          className="wide"
+          {...bench.choice('takenOut')}
+        />
         <NumberInput
           label="Store at"
           error={bench.read('store') === null ? 'Enter a number.' : undefined}
@@ -74,7 +79,11 @@ function Holding({ bench: { typed, read } }: { bench: Bench<keyof typeof FIELDS>
   if (putInAt && temperatureC === null) return <NoAnswer says="Enter how cold the store is." />;
   const stays: ColdStay[] =
     putInAt && temperatureC !== null ? [{ putInAt, temperatureC, ...(takenOutAt && { takenOutAt }) }] : [];
-  const clock = holdingClock(HOLDING_LIMITS, { alloy: choiceOf(HELD, typed.alloy, '2024'), quenchedAt, stays });
+  const clock = holdingClock(HOLDING_LIMITS, {
+    alloy: choiceOf(HELD, typed.alloy, '2024'),
+    quenchedAt,
+    stays,
+  });
   if (!clock.ok)
     return (
       <>

@@ -44,7 +44,9 @@ const FIELDS = {
 } as const;
 const MEDIA = { air: 'air furnace', salt: 'salt bath' };
 const SURFACES = { bare: 'bare', clad: 'clad' };
-const TREATED: readonly Alloy[] = [...new Set(SOLUTION_TEMPERATURES.rows.flatMap(({ alloys }) => (alloys === 'any' ? [] : alloys)))];
+const TREATED: readonly Alloy[] = [
+  ...new Set(SOLUTION_TEMPERATURES.rows.flatMap(({ alloys }) => (alloys === 'any' ? [] : alloys))),
+];
 type LoadBench = Bench<keyof typeof FIELDS>;
 
 /** Which lines of sheet may lie in the furnace together, in how few loads, and why the others may not. */
@@ -73,7 +75,10 @@ export function LoadCalculator({ given }: { given: Given }) {
       <SourcedTable
         table={SOLUTION_TEMPERATURES}
         heads={['Alloys', '°F']}
-        cells={({ alloys, rangeF }) => [alloys === 'any' ? 'any' : alloys.join(', '), rangeF?.join(' to ') ?? '']}
+        cells={({ alloys, rangeF }) => [
+          alloys === 'any' ? 'any' : alloys.join(', '),
+          rangeF?.join(' to ') ?? '',
+        ]}
       />
     </CalculatorFrame>
   );
@@ -97,8 +102,16 @@ function LineFields({ line, bench }: { line: LineName; bench: LoadBench }) {
             error={isUnread ? 'Enter a number.' : undefined}
             {...bench.field(fieldOf(line, 'thick'))}
           />
-          <SelectField label="Surface" options={optionsOf(SURFACES)} {...bench.choice(fieldOf(line, 'clad'))} />
-          <SelectField label="Wanted" options={optionsSaying(WANTED)} {...bench.choice(fieldOf(line, 'to'))} />
+          <SelectField
+            label="Surface"
+            options={optionsOf(SURFACES)}
+            {...bench.choice(fieldOf(line, 'clad'))}
+          />
+          <SelectField
+            label="Wanted"
+            options={optionsSaying(WANTED)}
+            {...bench.choice(fieldOf(line, 'to'))}
+          />
         </>
       )}
     </BenchFieldRow>

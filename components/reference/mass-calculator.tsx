@@ -76,7 +76,11 @@ export function MassCalculator({ given }: { given: Given }) {
 
 function Mass({ bench: { typed, read, units } }: { bench: Bench<keyof typeof FIELDS> }) {
   const pieces = read('pieces');
-  const shape = shapeOf(choiceOf(KINDS, typed.form, 'sheet'), [read('length'), read('second'), read('third')]);
+  const shape = shapeOf(choiceOf(KINDS, typed.form, 'sheet'), [
+    read('length'),
+    read('second'),
+    read('third'),
+  ]);
   if (!shape) return <NoAnswer says="Enter every size." />;
   if (pieces === null || !Number.isSafeInteger(pieces) || pieces < 1)
     return <NoAnswer says="Pieces are a whole number from 1." />;

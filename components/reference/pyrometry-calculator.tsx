@@ -51,7 +51,11 @@ export function PyrometryCalculator({ given }: { given: Given }) {
     >
       <BenchFieldRow label="Furnace">
         <SelectField label="Furnace class" options={CLASSES} {...bench.choice('class')} />
-        <SelectField label="Instruments" options={optionsSaying(INSTRUMENTATION_TYPES)} {...bench.choice('type')} />
+        <SelectField
+          label="Instruments"
+          options={optionsSaying(INSTRUMENTATION_TYPES)}
+          {...bench.choice('type')}
+        />
         <SelectField label="Intervals" options={optionsOf(EXTENDED)} {...bench.choice('extended')} />
       </BenchFieldRow>
       <BenchFieldRow label="Cycle">

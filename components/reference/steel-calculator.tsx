@@ -137,18 +137,21 @@ function AfterQuench({ bench }: { bench: SteelBench }) {
 
 function Conditions({ steel, least, bench }: StrengthProps) {
   const found = phConditionsFor(PH_STEEL_CONDITIONS, { steel, tensileMpaMin: least });
-  if (!found.ok)
-    return <NoAnswer says={`No condition of ${steel} in the tables is as strong as that.`} />;
+  if (!found.ok) return <NoAnswer says={`No condition of ${steel} in the tables is as strong as that.`} />;
   const [first] = found.conditions;
   return (
     <>
-      <Answer good={null} says={first?.condition ?? ''} rest="the weakest that is strong enough is the toughest" />
+      <Answer
+        good={null}
+        says={first?.condition ?? ''}
+        rest="the weakest that is strong enough is the toughest"
+      />
       <ul>
         {found.conditions.map((one) => (
           <li key={one.condition}>
             <strong>{one.condition}</strong>: {bench.says(one.temperatureC, 'temperature')},{' '}
-            {spanWords(one.soakMin)} to {spanWords(one.soakMinMax)};{' '}
-            {bench.says(one.tensileMpaMin, 'stress')} at least, HRC {one.hrcMin} to {one.hrcMax}
+            {spanWords(one.soakMin)} to {spanWords(one.soakMinMax)}; {bench.says(one.tensileMpaMin, 'stress')}{' '}
+            at least, HRC {one.hrcMin} to {one.hrcMax}
           </li>
         ))}
       </ul>
@@ -172,7 +175,8 @@ function Window({ steel, operation, most, bench }: WindowProps) {
     <div className="border-t border-rule py-1.5">
       <strong>{OPERATIONS[operation]}</strong>{' '}
       <span className="num">
-        {bench.says(found.temperatureCMin, 'temperature')} to {bench.says(found.temperatureCMax, 'temperature')}
+        {bench.says(found.temperatureCMin, 'temperature')} to{' '}
+        {bench.says(found.temperatureCMax, 'temperature')}
       </span>
       {found.quench && `, ${QUENCHES[found.quench]}`}
       {found.coolBelowC !== undefined &&

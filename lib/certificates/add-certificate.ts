@@ -23,16 +23,14 @@ export async function addCertificate(ctx: Ctx, { batchId, fileId }: { batchId: s
       extra: { certificateId: known.id },
     });
   const id = newId();
-  await ctx.tx
-    .insert(certificates)
-    .values({
-      id,
-      shopId: shopOf(ctx),
-      batchId,
-      fileId: file.id,
-      sentBy: ctx.actor.name,
-      createdAt: ctx.now,
-    });
+  await ctx.tx.insert(certificates).values({
+    id,
+    shopId: shopOf(ctx),
+    batchId,
+    fileId: file.id,
+    sentBy: ctx.actor.name,
+    createdAt: ctx.now,
+  });
   await recordAudit(ctx, {
     action: 'certificate.add',
     entity: 'certificate',

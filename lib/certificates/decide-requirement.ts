@@ -44,14 +44,12 @@ export async function decideRequirement(ctx: Ctx, input: Input) {
   };
   if (before) await ctx.tx.update(decisions).set(values).where(eq(decisions.id, before.id));
   else
-    await ctx.tx
-      .insert(decisions)
-      .values({
-        ...values,
-        shopId: shopOf(ctx),
-        certificateId: input.certificateId,
-        requirementId: input.requirementId,
-      });
+    await ctx.tx.insert(decisions).values({
+      ...values,
+      shopId: shopOf(ctx),
+      certificateId: input.certificateId,
+      requirementId: input.requirementId,
+    });
   await recordAudit(ctx, {
     action: values.overrideReason === null ? 'certificate.decide' : 'certificate.override',
     entity: 'certificate',

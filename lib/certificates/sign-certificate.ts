@@ -61,32 +61,28 @@ export async function signCertificate(ctx: Ctx, input: Input) {
   };
   const { sealed, seal } = sealUp(content);
   const shopId = shopOf(ctx);
-  await ctx.tx
-    .insert(signatures)
-    .values({
-      id,
+  await ctx.tx.insert(signatures).values({
+    id,
+    shopId,
+    certificateId: certificate.id,
+    batchId: batch.id,
+    sentence,
+    fileSha256: file.sha256,
+    sealed,
+    seal,
+    signedBy: signer.id,
+    signerName: signer.name,
+    signedAt: ctx.now,
+  });
+  await ctx.tx.insert(coverage).values(
+    input.coverage.map(({ lineId, pieces }) => ({
       shopId,
+      signatureId: id,
       certificateId: certificate.id,
-      batchId: batch.id,
-      sentence,
-      fileSha256: file.sha256,
-      sealed,
-      seal,
-      signedBy: signer.id,
-      signerName: signer.name,
-      signedAt: ctx.now,
-    });
-  await ctx.tx
-    .insert(coverage)
-    .values(
-      input.coverage.map(({ lineId, pieces }) => ({
-        shopId,
-        signatureId: id,
-        certificateId: certificate.id,
-        lineId,
-        pieces,
-      })),
-    );
+      lineId,
+      pieces,
+    })),
+  );
   const pieces = input.coverage.reduce((sum, line) => sum + line.pieces, 0);
   await recordAudit(ctx, {
     action: 'certificate.sign',

@@ -24,18 +24,16 @@ export async function shareDossier(
   const { lot } = await readDossier(ctx, lotId);
   const [id, token] = [newId(), newToken()];
   const expiresAt = new Date(ctx.now.getTime() + days * DAY_MS);
-  await ctx.tx
-    .insert(dossierLinks)
-    .values({
-      id,
-      shopId: shopOf(ctx),
-      lotId,
-      tokenHash: hashToken(token),
-      forWhom,
-      expiresAt,
-      createdBy: ctx.actor.name,
-      createdAt: ctx.now,
-    });
+  await ctx.tx.insert(dossierLinks).values({
+    id,
+    shopId: shopOf(ctx),
+    lotId,
+    tokenHash: hashToken(token),
+    forWhom,
+    expiresAt,
+    createdBy: ctx.actor.name,
+    createdAt: ctx.now,
+  });
   await recordAudit(ctx, {
     action: 'dossier.share',
     entity: 'lot',

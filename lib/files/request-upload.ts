@@ -114,16 +114,14 @@ interface NewFile {
 async function announce(ctx: Ctx, file: NewFile): Promise<string> {
   const id = newId();
   const shopId = shopOf(ctx);
-  await ctx.tx
-    .insert(files)
-    .values({
-      id,
-      shopId,
-      ...file,
-      storageKey: `files/${shopId}/${id}`,
-      uploadedBy: ctx.actor.name,
-      createdAt: ctx.now,
-    });
+  await ctx.tx.insert(files).values({
+    id,
+    shopId,
+    ...file,
+    storageKey: `files/${shopId}/${id}`,
+    uploadedBy: ctx.actor.name,
+    createdAt: ctx.now,
+  });
   await recordAudit(ctx, { action: 'file.announce', entity: 'file', entityId: id, after: { ...file } });
   return id;
 }

@@ -28,18 +28,16 @@ export async function addInvoice(
     .select({ currency: batches.currency })
     .from(batches)
     .where(eq(batches.id, batchId));
-  await ctx.tx
-    .insert(invoices)
-    .values({
-      id,
-      shopId: shopOf(ctx),
-      processorId: batch.processorId,
-      batchId,
-      fileId,
-      currency: order?.currency ?? 'USD',
-      sentBy: ctx.actor.name,
-      createdAt: ctx.now,
-    });
+  await ctx.tx.insert(invoices).values({
+    id,
+    shopId: shopOf(ctx),
+    processorId: batch.processorId,
+    batchId,
+    fileId,
+    currency: order?.currency ?? 'USD',
+    sentBy: ctx.actor.name,
+    createdAt: ctx.now,
+  });
   await recordAudit(ctx, {
     action: 'invoice.add',
     entity: 'invoice',

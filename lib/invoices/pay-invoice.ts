@@ -37,18 +37,16 @@ export async function payInvoice(ctx: Ctx, input: { invoiceId: string; version: 
 
   const id = newId();
   const attempt = (last?.attempt ?? 0) + 1;
-  await ctx.tx
-    .insert(payments)
-    .values({
-      id,
-      shopId: shopOf(ctx),
-      invoiceId: invoice.id,
-      attempt,
-      amountMinor,
-      currency: invoice.currency,
-      paidBy,
-      startedAt: ctx.now,
-    });
+  await ctx.tx.insert(payments).values({
+    id,
+    shopId: shopOf(ctx),
+    invoiceId: invoice.id,
+    attempt,
+    amountMinor,
+    currency: invoice.currency,
+    paidBy,
+    startedAt: ctx.now,
+  });
   await enqueue(ctx, payInvoiceQueue, { shopId: shopOf(ctx), paymentId: id, ...way });
   await recordAudit(ctx, {
     action: 'invoice.pay',

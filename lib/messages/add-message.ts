@@ -24,20 +24,18 @@ export async function addMessage(ctx: Ctx, said: Said): Promise<{ id: string }> 
   const about = lineId === null ? null : await lineWords(ctx, batchId, lineId);
   const question = await questionOf(ctx, said);
   const id = newId();
-  await ctx.tx
-    .insert(messages)
-    .values({
-      id,
-      shopId: shopOf(ctx),
-      batchId,
-      lineId,
-      kind,
-      side,
-      author: ctx.actor.name,
-      body,
-      answersId,
-      createdAt: ctx.now,
-    });
+  await ctx.tx.insert(messages).values({
+    id,
+    shopId: shopOf(ctx),
+    batchId,
+    lineId,
+    kind,
+    side,
+    author: ctx.actor.name,
+    body,
+    answersId,
+    createdAt: ctx.now,
+  });
   await recordAudit(ctx, {
     action: `message.${kind}`,
     entity: 'batch',

@@ -73,19 +73,17 @@ export async function inviteColleague(
           isNull(invitations.withdrawnAt),
         ),
       );
-    await ctx.tx
-      .insert(invitations)
-      .values({
-        id: newId(),
-        processorId,
-        email,
-        name,
-        roles: ['processor'],
-        tokenHash: hashToken(token),
-        invitedBy: personOf(ctx.actor),
-        expiresAt,
-        createdAt: ctx.now,
-      });
+    await ctx.tx.insert(invitations).values({
+      id: newId(),
+      processorId,
+      email,
+      name,
+      roles: ['processor'],
+      tokenHash: hashToken(token),
+      invitedBy: personOf(ctx.actor),
+      expiresAt,
+      createdAt: ctx.now,
+    });
   });
   await queueMail(ctx, {
     template: 'invitation',

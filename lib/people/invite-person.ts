@@ -61,19 +61,17 @@ export async function invitePerson(
 
   const invitationId = newId();
   const token = newToken();
-  await ctx.tx
-    .insert(invitations)
-    .values({
-      id: invitationId,
-      shopId,
-      email,
-      name,
-      roles,
-      tokenHash: hashToken(token),
-      invitedBy: personOf(ctx.actor),
-      expiresAt: expiryOf(ctx),
-      createdAt: ctx.now,
-    });
+  await ctx.tx.insert(invitations).values({
+    id: invitationId,
+    shopId,
+    email,
+    name,
+    roles,
+    tokenHash: hashToken(token),
+    invitedBy: personOf(ctx.actor),
+    expiresAt: expiryOf(ctx),
+    createdAt: ctx.now,
+  });
   await mailInvitation(ctx, { email, name, roles, token });
   await recordAudit(ctx, {
     action: 'invitation.send',

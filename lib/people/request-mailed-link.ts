@@ -61,16 +61,14 @@ async function mailLink(ctx: Ctx, { email, purpose, addressOf }: Asked): Promise
 
   const token = newToken();
   const expiresAt = new Date(ctx.now.getTime() + VALID_MIN[purpose] * 60_000);
-  await ctx.tx
-    .insert(mailedLinks)
-    .values({
-      id: newId(),
-      userId: user.id,
-      purpose,
-      tokenHash: hashToken(token),
-      expiresAt,
-      createdAt: ctx.now,
-    });
+  await ctx.tx.insert(mailedLinks).values({
+    id: newId(),
+    userId: user.id,
+    purpose,
+    tokenHash: hashToken(token),
+    expiresAt,
+    createdAt: ctx.now,
+  });
   await queueMail(ctx, {
     template: purpose === 'reset' ? 'reset' : 'sign-in',
     to: email,

@@ -23,16 +23,14 @@ export async function addPromise(
     .orderBy(desc(promises.madeAt), desc(promises.id))
     .limit(1);
   if (last?.promisedOn === promisedOn && note === '') return;
-  await ctx.tx
-    .insert(promises)
-    .values({
-      shopId: shopOf(ctx),
-      batchId,
-      promisedOn,
-      note: note || null,
-      madeBy: ctx.actor.name,
-      madeAt: ctx.now,
-    });
+  await ctx.tx.insert(promises).values({
+    shopId: shopOf(ctx),
+    batchId,
+    promisedOn,
+    note: note || null,
+    madeBy: ctx.actor.name,
+    madeAt: ctx.now,
+  });
   await recordAudit(ctx, {
     action: 'batch.promise',
     entity: 'batch',

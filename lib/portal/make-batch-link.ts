@@ -10,15 +10,13 @@ export async function makeBatchLink(
   { batchId, processorId }: { batchId: string; processorId: string },
 ): Promise<{ linkId: string; url: string }> {
   const linkId = newId();
-  await ctx.tx
-    .insert(batchLinks)
-    .values({
-      id: linkId,
-      shopId: shopOf(ctx),
-      batchId,
-      processorId,
-      tokenHash: hashToken(batchLinkToken(linkId)),
-      createdAt: ctx.now,
-    });
+  await ctx.tx.insert(batchLinks).values({
+    id: linkId,
+    shopId: shopOf(ctx),
+    batchId,
+    processorId,
+    tokenHash: hashToken(batchLinkToken(linkId)),
+    createdAt: ctx.now,
+  });
   return { linkId, url: batchLinkUrl(linkId) };
 }

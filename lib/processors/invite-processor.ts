@@ -95,18 +95,16 @@ async function replaceInvitation(
       ),
     );
   const id = newId();
-  await ctx.tx
-    .insert(invitations)
-    .values({
-      id,
-      processorId,
-      email,
-      name,
-      roles: ['processor'],
-      tokenHash: hashToken(token),
-      invitedBy: personOf(ctx.actor),
-      expiresAt,
-      createdAt: ctx.now,
-    });
+  await ctx.tx.insert(invitations).values({
+    id,
+    processorId,
+    email,
+    name,
+    roles: ['processor'],
+    tokenHash: hashToken(token),
+    invitedBy: personOf(ctx.actor),
+    expiresAt,
+    createdAt: ctx.now,
+  });
   return id;
 }

@@ -94,30 +94,26 @@ async function refuseUnusablePhotos(ctx: Ctx, { photos }: Input): Promise<void> 
 async function keepCount(ctx: Ctx, batchId: string, input: Input): Promise<string> {
   const receiptId = newId();
   const shopId = shopOf(ctx);
-  await ctx.tx
-    .insert(receipts)
-    .values({
-      id: receiptId,
+  await ctx.tx.insert(receipts).values({
+    id: receiptId,
+    shopId,
+    batchId,
+    receivedAt: ctx.now,
+    receivedBy: ctx.actor.name,
+    note: input.note || null,
+  });
+  await ctx.tx.insert(receiptLines).values(
+    input.lines.map(({ lineId, good, damaged, short, over, note }) => ({
       shopId,
-      batchId,
-      receivedAt: ctx.now,
-      receivedBy: ctx.actor.name,
-      note: input.note || null,
-    });
-  await ctx.tx
-    .insert(receiptLines)
-    .values(
-      input.lines.map(({ lineId, good, damaged, short, over, note }) => ({
-        shopId,
-        receiptId,
-        lineId,
-        good,
-        damaged,
-        short,
-        over,
-        note: note || null,
-      })),
-    );
+      receiptId,
+      lineId,
+      good,
+      damaged,
+      short,
+      over,
+      note: note || null,
+    })),
+  );
   if (input.photos.length > 0)
     await ctx.tx
       .insert(receiptPhotos)

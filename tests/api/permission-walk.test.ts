@@ -51,16 +51,14 @@ beforeAll(async () => {
       ] as const,
   );
   linkId = newId();
-  await base.owner
-    .insert(batchLinks)
-    .values({
-      id: linkId,
-      shopId: shopA.shopId,
-      batchId: linked.id,
-      processorId: shopA.processorId,
-      tokenHash: randomUUID(),
-      createdAt: new Date(),
-    });
+  await base.owner.insert(batchLinks).values({
+    id: linkId,
+    shopId: shopA.shopId,
+    batchId: linked.id,
+    processorId: shopA.processorId,
+    tokenHash: randomUUID(),
+    createdAt: new Date(),
+  });
   known = { ...(await idsOf(shopA)), batchId: batch.id };
 }, 120_000);
 

@@ -18,19 +18,17 @@ export async function makeApproval(
 ) {
   const today = calendarDay(ctx.now, 'UTC');
   const id = newId();
-  await ctx.tx
-    .insert(approvals)
-    .values({
-      id,
-      shopId: shopOf(ctx),
-      processorId,
-      reference: `AP-${id.slice(-4)}`,
-      processes: [...PROCESSES],
-      validFrom: addDays(today, -365),
-      validTo: addDays(today, 365),
-      createdAt: ctx.now,
-      ...given,
-    });
+  await ctx.tx.insert(approvals).values({
+    id,
+    shopId: shopOf(ctx),
+    processorId,
+    reference: `AP-${id.slice(-4)}`,
+    processes: [...PROCESSES],
+    validFrom: addDays(today, -365),
+    validTo: addDays(today, 365),
+    createdAt: ctx.now,
+    ...given,
+  });
   return id;
 }
 

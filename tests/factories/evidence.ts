@@ -38,22 +38,20 @@ export async function makeFile(
   const sha256 = createHash('sha256')
     .update(given.content ?? id)
     .digest('hex');
-  await ctx.tx
-    .insert(files)
-    .values({
-      id,
-      shopId: shopOf(ctx),
-      batchId: given.batchId ?? null,
-      purpose: given.purpose,
-      name: `${id.slice(-4)}.pdf`,
-      mediaType: 'application/pdf',
-      size: 100,
-      sha256,
-      storageKey: `files/${id}`,
-      state: given.state ?? 'verified',
-      uploadedBy: 'Test Person',
-      createdAt: ctx.now,
-    });
+  await ctx.tx.insert(files).values({
+    id,
+    shopId: shopOf(ctx),
+    batchId: given.batchId ?? null,
+    purpose: given.purpose,
+    name: `${id.slice(-4)}.pdf`,
+    mediaType: 'application/pdf',
+    size: 100,
+    sha256,
+    storageKey: `files/${id}`,
+    state: given.state ?? 'verified',
+    uploadedBy: 'Test Person',
+    createdAt: ctx.now,
+  });
   return id;
 }
 

@@ -26,24 +26,20 @@ export interface World {
  */
 export async function makeWorld(db: Db, owner: Db): Promise<World> {
   const [shopId, processorId, userId, portalUserId] = [newId(), newId(), newId(), newId()];
-  await owner
-    .insert(shops)
-    .values({
-      id: shopId,
-      name: `Shop ${shopId.slice(-6)}`,
-      zone: 'UTC',
-      currency: 'USD',
-      orderPrefix: 'TP',
-      createdAt: TODAY,
-    });
-  await owner
-    .insert(processors)
-    .values({
-      id: processorId,
-      name: `Processor ${processorId.slice(-6)}`,
-      email: `desk-${processorId}@processor.test`,
-      createdAt: TODAY,
-    });
+  await owner.insert(shops).values({
+    id: shopId,
+    name: `Shop ${shopId.slice(-6)}`,
+    zone: 'UTC',
+    currency: 'USD',
+    orderPrefix: 'TP',
+    createdAt: TODAY,
+  });
+  await owner.insert(processors).values({
+    id: processorId,
+    name: `Processor ${processorId.slice(-6)}`,
+    email: `desk-${processorId}@processor.test`,
+    createdAt: TODAY,
+  });
   await owner
     .insert(shopProcessors)
     .values({ shopId, processorId, contactEmail: `desk-${processorId}@processor.test`, createdAt: TODAY });

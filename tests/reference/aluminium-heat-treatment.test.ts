@@ -268,7 +268,7 @@ describe('the clock of the soak', () => {
       { at: minute(20), metalC: [493, 489] },
       { at: minute(50), metalC: [494, 492] },
     ];
-    expect(soakRun(readings, 488)).toEqual({
+    expect(soakRun(readings, 488)).toMatchObject({
       ok: true,
       startedAt: minute(20),
       soakedMin: 30,

@@ -59,7 +59,8 @@ describe('a specification as people write it', () => {
     ['DTD 390', 'DTD', 'DTD 390', null, ''],
     ['BS 2S28', 'BS', 'BS S28', '2', ''],
     ['BS L72', 'BS', 'BS L72', null, ''],
-  ] as const)('%s', (text, body, number, revision, rest) => {
+  ] as const)('%s', (...row) => {
+    const [text, body, number, revision, rest] = row;
     expect(recogniseSpecification(text)).toEqual({ body, number, revision, rest });
   });
 

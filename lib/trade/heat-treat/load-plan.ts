@@ -79,8 +79,9 @@ export function planLoads(tables: LoadTables, groups: readonly LoadGroup[], unif
 const kindOf = ({ group, solution, ageing }: LoadNeeds): string =>
   JSON.stringify([group.process, group.medium, group.quench, solution, [...ageing.keys()]]);
 
-const pick = <Item>(items: readonly Item[], positions: readonly number[]): Item[] =>
-  positions.flatMap((at) => items[at] ?? []);
+function pick<Item>(items: readonly Item[], positions: readonly number[]): Item[] {
+  return positions.flatMap((at) => items[at] ?? []);
+}
 
 function toLoad(tables: LoadTables, all: readonly LoadNeeds[], cycle: SharedCycle): PlannedLoad {
   const delays = all.map(({ group }) => quenchDelay(tables.quenchDelays, group));

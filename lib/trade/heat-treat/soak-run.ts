@@ -7,11 +7,17 @@ export interface SoakReading {
 }
 
 export type SoakRun =
-  | { readonly ok: true; readonly startedAt: Date; readonly soakedMin: number; readonly hottestC: number }
+  | {
+      readonly ok: true;
+      readonly startedAt: Date;
+      readonly soakedMin: number;
+      readonly hottestC: number;
+      readonly source: Source;
+    }
   | { readonly ok: false; readonly reason: 'never_reached' | 'interrupted' | 'no_readings' };
 
 /** When the soak begins to count, and that it may not be interrupted. */
-export const SOAK_CLOCK: Source = {
+const SOAK_CLOCK: Source = {
   document: 'FAA-H-8083-30, heat treatment of nonferrous metals; AMS2770R for interruption',
   confidence: 'read',
   certainty: 'high',
@@ -41,6 +47,7 @@ export function soakRun(readings: readonly SoakReading[], lowC: number): SoakRun
     startedAt: started.at,
     soakedMin: (last.at.getTime() - started.at.getTime()) / MS_PER_MIN,
     hottestC: Math.max(...readings.flatMap(({ metalC }) => metalC)),
+    source: SOAK_CLOCK,
   };
 }
 

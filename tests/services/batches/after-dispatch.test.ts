@@ -90,15 +90,13 @@ test('once something was counted in, or an invoice stands, it is not cancelled',
   await base.owner
     .insert(receipts)
     .values({ shopId: here.shopId, batchId: first.id, receivedAt: TODAY, receivedBy: 'Test Person' });
-  await base.owner
-    .insert(invoices)
-    .values({
-      shopId: here.shopId,
-      batchId: second.id,
-      processorId: here.processorId,
-      currency: 'USD',
-      sentBy: 'Test Processor',
-    });
+  await base.owner.insert(invoices).values({
+    shopId: here.shopId,
+    batchId: second.id,
+    processorId: here.processorId,
+    currency: 'USD',
+    sentBy: 'Test Processor',
+  });
   const cancel = (batch: { id: string; version: number }) =>
     here.as(['lead'], (ctx) =>
       cancelBatch(ctx, { batchId: batch.id, version: batch.version, reason: 'Not needed' }),
@@ -193,32 +191,28 @@ test('a re-issue words a requirement anew, but not under a decision; and says wh
   expect(done.changes).toEqual(['Hardness: 65 to 83 HRB, was 63 to 83 HRB']);
 
   const [fileId, certificateId] = [newId(), newId()];
-  await base.owner
-    .insert(files)
-    .values({
-      id: fileId,
-      shopId: here.shopId,
-      batchId: id,
-      purpose: 'certificate',
-      name: 'c.pdf',
-      mediaType: 'application/pdf',
-      size: 1,
-      storageKey: fileId,
-      uploadedBy: 'Test Processor',
-    });
+  await base.owner.insert(files).values({
+    id: fileId,
+    shopId: here.shopId,
+    batchId: id,
+    purpose: 'certificate',
+    name: 'c.pdf',
+    mediaType: 'application/pdf',
+    size: 1,
+    storageKey: fileId,
+    uploadedBy: 'Test Processor',
+  });
   await base.owner
     .insert(certificates)
     .values({ id: certificateId, shopId: here.shopId, batchId: id, fileId, sentBy: 'Test Processor' });
-  await base.owner
-    .insert(decisions)
-    .values({
-      shopId: here.shopId,
-      certificateId,
-      requirementId,
-      verdict: 'meets',
-      decidedBy: 'Test Person',
-      decidedAt: TODAY,
-    });
+  await base.owner.insert(decisions).values({
+    shopId: here.shopId,
+    certificateId,
+    requirementId,
+    verdict: 'meets',
+    decidedBy: 'Test Person',
+    decidedAt: TODAY,
+  });
   await expect(
     reissue(done.version, { requirements: [{ requirementId, limit: '70', unit: 'HRB' }] }),
   ).rejects.toMatchObject({
@@ -230,17 +224,15 @@ test('a re-issue words a requirement anew, but not under a decision; and says wh
 test('prices of an approved invoice stay', async () => {
   const here = await world();
   const { id, version } = await sent(here);
-  await base.owner
-    .insert(invoices)
-    .values({
-      shopId: here.shopId,
-      batchId: id,
-      processorId: here.processorId,
-      currency: 'USD',
-      sentBy: 'Test Processor',
-      number: 'IN-7',
-      approvedAt: TODAY,
-    });
+  await base.owner.insert(invoices).values({
+    shopId: here.shopId,
+    batchId: id,
+    processorId: here.processorId,
+    currency: 'USD',
+    sentBy: 'Test Processor',
+    number: 'IN-7',
+    approvedAt: TODAY,
+  });
   await expect(
     here.as(['lead'], (ctx) =>
       reissueBatch(ctx, { batchId: id, version, ...nothingElse, lotMinimumMinor: 99_00 }),

@@ -173,16 +173,14 @@ test.each([
     await expect(
       here.as(['lead'], (ctx) => dispatchBatch(ctx, { batchId: id, version })),
     ).rejects.toMatchObject({ code: 'conflict', message: expect.stringContaining(says) as string });
-    await base.owner
-      .insert(overrides)
-      .values({
-        shopId: here.shopId,
-        batchId: id,
-        check: 'processor_not_approved',
-        subject: here.processorId,
-        reason: 'The renewed approval is in the post; checked by telephone.',
-        by: here.userId,
-      });
+    await base.owner.insert(overrides).values({
+      shopId: here.shopId,
+      batchId: id,
+      check: 'processor_not_approved',
+      subject: here.processorId,
+      reason: 'The renewed approval is in the post; checked by telephone.',
+      by: here.userId,
+    });
     await here.as(['lead'], (ctx) => dispatchBatch(ctx, { batchId: id, version }));
     await here.as(['lead'], async ({ tx }) => {
       const [paper] = await tx

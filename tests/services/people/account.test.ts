@@ -140,15 +140,13 @@ async function tokenMailed(): Promise<string> {
 test('a reset comes by mail, works once, ends every session and every other link', async () => {
   const { world, email } = await setup();
   const otherLink = newId() + newId();
-  await base.owner
-    .insert(mailedLinks)
-    .values({
-      userId: world.userId,
-      purpose: 'sign_in',
-      tokenHash: hashToken(otherLink),
-      expiresAt: new Date(TODAY.getTime() + 60_000),
-      createdAt: TODAY,
-    });
+  await base.owner.insert(mailedLinks).values({
+    userId: world.userId,
+    purpose: 'sign_in',
+    tokenHash: hashToken(otherLink),
+    expiresAt: new Date(TODAY.getTime() + 60_000),
+    createdAt: TODAY,
+  });
   expect(await atTheDoor(base.db, (ctx) => requestReset(ctx, { email }))).toEqual({ done: true });
   const token = await tokenMailed();
   expect(await atTheDoor(base.db, (ctx) => resetPassword(ctx, { token, password: NEW }))).toEqual({ email });

@@ -110,16 +110,14 @@ test('the counts do not list who has an account', async () => {
 
 async function makeLink(userId: string, given: Partial<typeof mailedLinks.$inferInsert> = {}) {
   const token = newId() + newId();
-  await base.owner
-    .insert(mailedLinks)
-    .values({
-      userId,
-      purpose: 'sign_in',
-      tokenHash: hashToken(token),
-      expiresAt: new Date(TODAY.getTime() + 60_000),
-      createdAt: TODAY,
-      ...given,
-    });
+  await base.owner.insert(mailedLinks).values({
+    userId,
+    purpose: 'sign_in',
+    tokenHash: hashToken(token),
+    expiresAt: new Date(TODAY.getTime() + 60_000),
+    createdAt: TODAY,
+    ...given,
+  });
   return token;
 }
 
@@ -176,15 +174,13 @@ test('somebody who works for two organisations goes from one to the other, and t
     await setup(),
   ];
   const membershipId = newId();
-  await base.owner
-    .insert(memberships)
-    .values({
-      id: membershipId,
-      userId: world.userId,
-      shopId: other.shopId,
-      roles: ['auditor'],
-      createdAt: TODAY,
-    });
+  await base.owner.insert(memberships).values({
+    id: membershipId,
+    userId: world.userId,
+    shopId: other.shopId,
+    roles: ['auditor'],
+    createdAt: TODAY,
+  });
   expect(await countOrganisations(base.db, world.userId)).toBe(2);
   const now = await signIn(PASSWORD);
   expect(await chooseOrganisation(base.db, { now, membershipId })).toMatchObject({
