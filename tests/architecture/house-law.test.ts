@@ -30,7 +30,7 @@ function boundIn(file: string): Bound[] {
       /run:\s*([\w.]+)/.exec(bound)?.[1] ??
       /=>\s*([\w.]+)\(/.exec(bound)?.[1] ??
       /^\{?[\s\S]*?\brun\b/.exec(bound.trim() === 'run' ? bound : '')?.[0] ??
-      bound.trim();
+      bound.trim().replace(/,$/, '');
     const [head = '', member] = named.split('.');
     const source = imports.get(head);
     return { endpoint, declaration, verb: member ?? source?.name ?? head, verbFile: source?.from ?? file };
