@@ -1,4 +1,5 @@
-import { operationWords, WHY_NOT } from '@/components/reference/temper-words';
+import { operationWords } from '@/components/reference/temper-words';
+import { WHY_NOT } from '@/lib/reference/why-not';
 import type { CheckLevel } from '@/components/ui/marks';
 import type { explainTyped } from '@/lib/parts/condition-choices';
 

@@ -2,7 +2,9 @@ import { TEMPER_TRANSITIONS, type TransitionRow } from '@/lib/trade/tables/tempe
 import { TEMPER_DESIGNATIONS, type TemperRow } from '@/lib/trade/tables/tempers';
 
 import { SourcedTable } from './sourced-table';
-import { operationWords, WHY_NOT } from './temper-words';
+import { WHY_NOT } from '@/lib/reference/why-not';
+
+import { operationWords } from './temper-words';
 
 const MADE_BY: Record<TemperRow['madeBy'], string> = {
   mill: 'mill',

@@ -1,6 +1,7 @@
+import { WHY_NOT } from '@/lib/reference/why-not';
 import type { ConditionStep } from '@/lib/trade/tempers/condition-graph';
 import type { explainCondition } from '@/lib/trade/tempers/explain-condition';
-import type { Operation, WhyNot } from '@/lib/trade/tables/temper-transitions';
+import type { Operation } from '@/lib/trade/tables/temper-transitions';
 
 const OPERATIONS: Record<Operation, string> = {
   solution_heat_treat: 'solution heat treat',
@@ -11,16 +12,6 @@ const OPERATIONS: Record<Operation, string> = {
   two_step_age: 'age in two steps',
   second_step_age: 'age, second step',
   anneal: 'anneal',
-};
-
-export const WHY_NOT: Record<WhyNot, string> = {
-  needs_mill_cold_work: 'It needs cold work between quench and ageing, which only the mill does.',
-  needs_mill_stretch: 'It needs stretching after the quench, which only the mill does.',
-  ageing_gives_another_temper: 'Ageing makes another temper of it.',
-  ageing_cannot_be_undone: 'What ageing did can not be taken back without solution treating again.',
-  needs_re_solution: 'It has to be solution treated again first.',
-  never_stable_at_room_temperature: 'This alloy never becomes stable at room temperature.',
-  not_hardened_by_ageing: 'This alloy is not hardened by ageing.',
 };
 
 const CAUTIONS: Record<ConditionStep['cautions'][number], string> = {

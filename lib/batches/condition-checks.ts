@@ -1,7 +1,7 @@
 import { temperOf, type PartMaterial } from '@/lib/parts/material-of';
 import type { BatchTables } from '@/lib/reference/batch-tables';
+import { WHY_NOT } from '@/lib/reference/why-not';
 import type { Process } from '@/lib/trade/process';
-import type { WhyNot } from '@/lib/trade/tables/temper-transitions';
 import { explainCondition, type Reach } from '@/lib/trade/tempers/explain-condition';
 import type { Grounds } from '@/lib/trade/verdict';
 
@@ -87,7 +87,7 @@ function findingOf(line: CheckedLine, answer: Answer): Finding[] {
         level: 'stop',
         subject,
         sentence: `Line ${line.lineNo} asks for ${to}, which no heat treater makes of ${from}.`,
-        rest: `${materialWords(wordsOf(line))}: ${WHY_NOT[answer.why]}${answer.gives ? `; trying gives ${answer.gives.condition}, whose allowables differ` : ''}.`,
+        rest: `${WHY_NOT[answer.why]}${answer.gives ? ` Trying gives ${materialWords(wordsOf(line))} in ${answer.gives.condition}, whose allowables differ.` : ''}`,
         source,
         waysOut: [takeOut(line), OVERRIDE],
       },
@@ -112,13 +112,3 @@ const wordsOf = ({ part: { alloy, clad, form } }: CheckedLine) =>
 
 const takeOut = ({ id, lineNo }: CheckedLine) =>
   ({ way: 'take_out_line', says: `Take line ${lineNo} out`, lineId: id }) as const;
-
-const WHY_NOT: Record<WhyNot, string> = {
-  needs_mill_cold_work: 'it needs cold work between quench and ageing, which only a mill does',
-  needs_mill_stretch: 'it needs a stretch after the quench, which only a mill does',
-  ageing_gives_another_temper: 'ageing it gives another condition',
-  ageing_cannot_be_undone: 'ageing cannot be undone without a new solution treatment',
-  needs_re_solution: 'it has to be solution treated again first',
-  never_stable_at_room_temperature: 'the alloy never becomes stable at room temperature',
-  not_hardened_by_ageing: 'the alloy is not hardened by ageing',
-};
