@@ -1,9 +1,8 @@
+import { WHY_NOT } from '@/lib/reference/why-not';
 import { TEMPER_TRANSITIONS, type TransitionRow } from '@/lib/trade/tables/temper-transitions';
 import { TEMPER_DESIGNATIONS, type TemperRow } from '@/lib/trade/tables/tempers';
 
 import { SourcedTable } from './sourced-table';
-import { WHY_NOT } from '@/lib/reference/why-not';
-
 import { operationWords } from './temper-words';
 
 const MADE_BY: Record<TemperRow['madeBy'], string> = {
