@@ -378,11 +378,12 @@ test('put aside keeps the pieces, is said before it leaves, and ends when it is 
     await makeApproval(ctx, here.processorId);
     const made = await makeBatch(ctx, here.processorId);
     const aside = await putBatchAside(ctx, { batchId: made.id, version: made.version, aside: true });
-    expect((await getBatchChecks(ctx, { batchId: made.id })).findings.map((finding) => finding.code)).toEqual(
-      ['put_aside'],
-    );
+    // Notes of the trade (loads, soak) stand beside it.
+    const codes = async () =>
+      (await getBatchChecks(ctx, { batchId: made.id })).findings.map((finding) => finding.code);
+    expect(await codes()).toContain('put_aside');
     await putBatchAside(ctx, { batchId: made.id, version: aside.version, aside: false });
-    expect((await getBatchChecks(ctx, { batchId: made.id })).findings).toEqual([]);
+    expect(await codes()).not.toContain('put_aside');
     const [asked] = await ctx.tx.select().from(requirements).where(eq(requirements.batchId, made.id));
     expect(asked).toBeDefined();
   });
