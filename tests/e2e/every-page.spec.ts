@@ -104,7 +104,7 @@ const WALKS = [
 const VIEWS = [
   { width: 1440, height: 900, colorScheme: 'light', look: looksRight },
   { width: 820, height: 1100, colorScheme: 'dark', look: fitsTheWindow },
-  { width: 390, height: 844, colorScheme: 'light', look: looksRight },
+  { width: 390, height: 844, colorScheme: 'light', look: fitsTheWindow },
 ] as const;
 
 for (const { name, email, pages } of WALKS) {
