@@ -86,7 +86,7 @@ function AssemblyRow({ assembly, tideline }: { assembly: AssemblyWait; tideline:
             <Link
               key={batch.id}
               href={`/batches/${batch.id}`}
-              className={`inline-flex items-center gap-1 text-(--ti) no-underline ${STAGE_TONES[batch.stage]}`}
+              className={`inline-flex min-h-6 items-center gap-1 text-(--ti) no-underline ${STAGE_TONES[batch.stage]}`}
               aria-label={`${batch.number}, ${STAGE_WORDS[batch.stage]}, ${batch.pieces} pieces`}
             >
               <StageMark stage={batch.stage} size={12} />
