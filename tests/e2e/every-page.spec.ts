@@ -1,7 +1,5 @@
 import type { APIRequestContext } from '@playwright/test';
 
-import { SUBJECTS } from '@/components/reference/subjects';
-
 import { expect, test } from './support/journey';
 import { fitsTheWindow, looksRight } from './support/look';
 
@@ -87,8 +85,6 @@ const NOBODY = [
   '/d/no-such-token',
 ];
 
-const BENCH = Object.keys(SUBJECTS).map((subject) => `/reference/${subject}`);
-
 const WALKS = [
   { name: 'Lead', email: 'liv@merganser.test', pages: LEAD },
   { name: 'Inspector', email: 'amos@merganser.test', pages: INSPECTOR },
@@ -97,7 +93,6 @@ const WALKS = [
   { name: 'Auditor', email: 'ada@merganser.test', pages: ['/', '/batches/{batch}', '/audit'] },
   { name: 'Processor', email: 'desk@galena-thermal.test', pages: PROCESSOR },
   { name: 'Nobody', email: null, pages: NOBODY },
-  { name: 'Bench', email: null, pages: BENCH },
 ] as const;
 
 /** Day at a desk and on a phone, night on a tablet; the contrast of both palettes is reckoned in a test of its own. */
