@@ -16,35 +16,37 @@ export function BuildUpDrawing({ surface, outward, before, after }: BuildUpDrawi
   const out = Math.round(Math.min(1, outward) * LAYER);
   const shape = SHAPES[shapeOf(surface)];
   return (
-    <svg
-      viewBox="0 0 720 236"
-      role="img"
-      aria-label={`Sketch, not to scale: before the finish ${before}, after it ${after}`}
-      className="h-auto w-full max-w-[720px] max-sm:min-w-[520px]"
-    >
-      <g transform="translate(20 10)">
-        <path d={shape(0)} fill="var(--deep)" stroke="var(--ink)" strokeWidth="1.8" fillRule="evenodd" />
-        <Under says="before" limits={before} />
-      </g>
-      <g transform="translate(390 10)">
-        <path
-          d={shape(out)}
-          fill="var(--dispatched-wash)"
-          stroke="var(--ink)"
-          strokeWidth="1.8"
-          fillRule="evenodd"
-        />
-        <path d={shape(out - LAYER)} fill="var(--deep)" stroke="var(--quiet)" fillRule="evenodd" />
-        <path
-          d={shape(0)}
-          fill="none"
-          stroke="var(--dispatched-ink)"
-          strokeDasharray="5 3"
-          strokeWidth="1.4"
-        />
-        <Under says="after; dashed: the surface before" limits={after} />
-      </g>
-    </svg>
+    <div className="overflow-x-auto">
+      <svg
+        viewBox="0 0 720 236"
+        role="img"
+        aria-label={`Sketch, not to scale: before the finish ${before}, after it ${after}`}
+        className="h-auto w-full max-w-[720px] max-sm:min-w-[520px]"
+      >
+        <g transform="translate(20 10)">
+          <path d={shape(0)} fill="var(--deep)" stroke="var(--ink)" strokeWidth="1.8" fillRule="evenodd" />
+          <Under says="before" limits={before} />
+        </g>
+        <g transform="translate(390 10)">
+          <path
+            d={shape(out)}
+            fill="var(--dispatched-wash)"
+            stroke="var(--ink)"
+            strokeWidth="1.8"
+            fillRule="evenodd"
+          />
+          <path d={shape(out - LAYER)} fill="var(--deep)" stroke="var(--quiet)" fillRule="evenodd" />
+          <path
+            d={shape(0)}
+            fill="none"
+            stroke="var(--dispatched-ink)"
+            strokeDasharray="5 3"
+            strokeWidth="1.4"
+          />
+          <Under says="after; dashed: the surface before" limits={after} />
+        </g>
+      </svg>
+    </div>
   );
 }
 

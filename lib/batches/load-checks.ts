@@ -48,7 +48,8 @@ function againstLoads(tables: CheckFacts['tables'], lines: readonly CheckedLine[
       {
         code: 'load_not_shared',
         level: 'warn' as const,
-        subject: '',
+        // Of two loads that do not hold, each is a finding of its own.
+        subject: `load ${loadNo}`,
         sentence: `Load ${loadNo} cannot be one load.`,
         rest: whyApart(plan),
         ...sourceOf(plan),
