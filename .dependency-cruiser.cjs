@@ -8,11 +8,30 @@ module.exports = {
   forbidden: [
     {
       name: 'rules-are-pure',
-      comment:
-        'lib/trade and lib/evidence: values in, verdict out. No database, clock, network, environment, React.',
+      comment: 'lib/trade: values in, verdict out. No database, clock, network, environment, React.',
       severity: 'error',
-      from: { path: '^lib/(trade|evidence)/' },
-      to: { pathNot: '^lib/(trade|evidence)/' },
+      from: { path: '^lib/trade/' },
+      to: { pathNot: '^lib/trade/' },
+    },
+    {
+      name: 'evidence-is-pure',
+      comment: 'lib/evidence: files in, facts out. No database, clock, network, environment, React.',
+      severity: 'error',
+      from: { path: '^lib/evidence/', pathNot: '^lib/evidence/open/' },
+      to: { pathNot: ['^lib/(trade|evidence)/', 'node_modules/(zod|papaparse)/'] },
+    },
+    {
+      name: 'only-opening-knows-file-formats',
+      comment: 'lib/evidence/open turns bytes into pages of words; what follows reads words only.',
+      severity: 'error',
+      from: { path: '^lib/evidence/open/' },
+      to: {
+        pathNot: [
+          '^lib/evidence/',
+          'node_modules/(pdfjs-dist|tesseract[.]js|@tesseract[.]js-data|sharp|@napi-rs/canvas|mailparser|file-type)/',
+          '^(node:)?(crypto|path|url|module|worker_threads)$',
+        ],
+      },
     },
     {
       name: 'lib-is-framework-free',
