@@ -63,6 +63,8 @@ export function chargesLotMinimum(
   if (asked === 0) return [];
   const least = minorOf(order.price?.lot_minimum ?? 0);
   const missing = (work: number) => Math.max(0, least - work);
+  const canReckon = lines.length > 0 && lines.every(({ amount }) => amount !== null);
+  if (least > 0 && !canReckon) return [];
   const asInvoiced = missing(sumMinor(lines.map(({ amount }) => amount)));
   const asAgreed = missing(
     lines.reduce(
