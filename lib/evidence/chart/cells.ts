@@ -41,6 +41,6 @@ export function numberIn(cell: string, decimal: Decimal): number {
 
 /** What recorders print for a thermocouple that is not there, broken, or beyond their range. */
 const FAULT =
-  /^(?:[-*?.#_=]{2,}|[-+]?(?:inf\w*|nan|1\.#\w+)|#?n\/?[ad]!?|null|none|invalid|bad|open|.*\b(?:open|burn ?-?out|broken|fault|fail(?:ed|ure)?|err(?:or)?|bruch|offen|ouvert|abierto|aperto|rotto|no ?tc|disc(?:onn\w*)?)\b.*|s\.? ?(?:br|break)\.?|b\.? ?out|[-+]?(?:over|under)(?: ?range)?|[-+]?o\.?l\.?|u\.?l\.?|[-+]?o\.?v(?:er|fl|r)?\.?|>+|<+|f[üu]hlerbruch|sensorbruch)$/i;
+  /^(?:[-*?.#_=]{2,}|[-+]?(?:inf\w*|nan|1\.#\w+)|#[\w/]+[!?]?|n\/?[ad]|null|none|invalid|bad|open|.*\b(?:open|burn ?-?out|broken|fault|fail(?:ed|ure)?|err(?:or)?|bruch|offen|ouvert|abierto|aperto|rotto|no ?tc|disc(?:onn\w*)?)\b.*|s\.? ?(?:br|break)\.?|b\.? ?out|[-+]?(?:over|under)(?: ?range)?|[-+]?o\.?l\.?|u\.?l\.?|[-+]?o\.?v(?:er|fl|r)?\.?|>+|<+|f[üu]hlerbruch|sensorbruch)$/i;
 
 export const isFault = (cell: string): boolean => cell !== '' && FAULT.test(cell);

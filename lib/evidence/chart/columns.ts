@@ -31,12 +31,19 @@ export const columnsOf = (
 
 function columnOf(at: number, cells: readonly string[], decimal: Decimal): Column {
   const filled = cells.filter((cell) => cell !== '');
-  const shapes = new Map<string, { shape: TimeShape; count: number }>();
+  const shapes = new Map<string, { shape: TimeShape; length: number; count: number }>();
   for (const cell of filled) {
     const shape = timeShapeOf(cell);
     if (!shape) continue;
     const key = shape.slots.join(' ');
-    shapes.set(key, { shape, count: (shapes.get(key)?.count ?? 0) + 1 });
+    const before = shapes.get(key);
+    // The shortest way of writing shows which groups have no leading zero.
+    const shorter = before && before.length <= cell.length;
+    shapes.set(key, {
+      shape: shorter ? before.shape : shape,
+      length: Math.min(before?.length ?? cell.length, cell.length),
+      count: (before?.count ?? 0) + 1,
+    });
   }
   const common = [...shapes.values()].toSorted((one, other) => other.count - one.count)[0];
   const numbers = filled.filter((cell) => isNumber(cell, decimal));

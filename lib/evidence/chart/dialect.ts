@@ -12,6 +12,8 @@ export interface Dialect {
 
 const DELIMITERS = ['\t', ';', ',', '|', ' '] as const;
 const DECIMALS = ['.', ','] as const;
+/** A preamble is not longer than this, and the dialect does not change behind it. */
+const HEAD_LINES = 250;
 /** Spaces may part the cells of any table: they are believed only where nothing else makes rows of nearly as many lines. */
 const SPACES_MUST_EXPLAIN = 2;
 
@@ -21,7 +23,9 @@ const SPACES_MUST_EXPLAIN = 2;
  * @returns null where none makes a table.
  */
 export function dialectOf(sample: SampleLines, corrections: ChartCorrections): Dialect | null {
-  const lines = [...sample.head, ...sample.further].filter((line) => line.trim() !== '').slice(0, 1500);
+  const lines = [...sample.head.slice(0, HEAD_LINES), ...sample.further]
+    .filter((line) => line.trim() !== '')
+    .slice(0, 2 * HEAD_LINES);
   let best: (Dialect & { score: number; rows: number }) | null = null;
   for (const delimiter of corrections.delimiter ? [corrections.delimiter] : DELIMITERS) {
     for (const decimal of corrections.decimal ? [corrections.decimal] : DECIMALS) {

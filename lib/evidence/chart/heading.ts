@@ -59,11 +59,12 @@ export function headingsOf(
   return { headings: stack.length > 0 ? headings : [], lines };
 }
 
-const withoutUnit = (name: string): string =>
-  name.replace(
-    new RegExp(String.raw`[\s_,]*(?:[([{]\s*${DEGREE}?\s*[CF]\s*[)\]}]|${DEGREE}\s*[CF])\s*$`, 'i'),
-    '',
-  ) || name;
+const UNIT_AT_END = new RegExp(
+  String.raw`[\s_,/]*(?:(?:\bin\s+)?(?:[([{]\s*${DEGREE}?\s*[CF]\s*[)\]}]|${DEGREE}\s*[CF])|(?<=_)[CF])\s*$`,
+  'i',
+);
+
+const withoutUnit = (name: string): string => name.replace(UNIT_AT_END, '').replace(/_$/, '') || name;
 
 /** In a table set with spaces names may hold single spaces, and day and time may share one heading. */
 function alignedCells(line: string, delimiter: Delimiter, width: number): readonly string[] {

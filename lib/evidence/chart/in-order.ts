@@ -78,11 +78,11 @@ function spread(seconds: Float64Array): boolean {
   return true;
 }
 
-function eachRun(seconds: Float64Array, use: (from: number, to: number) => void): void {
+function eachRun(seconds: Float64Array, each: (from: number, to: number) => void): void {
   let from = 0;
   for (let row = 1; row <= seconds.length; row++) {
     if (row < seconds.length && seconds[row] === seconds[from]) continue;
-    use(from, row);
+    each(from, row);
     from = row;
   }
 }

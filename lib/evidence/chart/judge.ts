@@ -37,7 +37,7 @@ export function seenIn(recording: Recording, requirement: ChartRequirement): See
   const { seconds } = recording;
   const band = bandOverTime(seconds.length, counted);
   const { soak } = band;
-  const quench = soak?.ended ? quenchAfter(seconds, counted, soak) : null;
+  const quench = soak && quenchAfter(seconds, counted, [soak, ...band.later]);
   return {
     recording,
     requirement,

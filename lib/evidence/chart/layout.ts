@@ -25,6 +25,9 @@ export interface Layout {
   readonly preamble: readonly string[];
 }
 
+/** So many rows tell what a column is; those from further on tell what it becomes. */
+const ROWS_SEEN = 400;
+
 /**
  * Finds the table in an export: its dialect, headings, clock and columns of numbers.
  *
@@ -39,7 +42,7 @@ export function layoutOf(sample: SampleLines, corrections: ChartCorrections): La
   if (first < 0) return null;
   const above = sample.head.slice(0, first);
   const { headings, lines } = headingsOf(above, dialect);
-  const rows = [...sample.head.slice(first), ...sample.further]
+  const rows = [...sample.head.slice(first, first + ROWS_SEEN), ...sample.further]
     .filter(isRow)
     .map((line) => cellsOf(line, delimiter));
   const columns = columnsOf(rows, width, decimal);

@@ -26,15 +26,30 @@ const [WINDOW_ROWS, WINDOW_S] = [90, 420];
  * Finds the quench behind a soak and its delay. The door opens for all at once, so the fall begins at the median of what
  * the thermocouples show; the delay ends when the last of them plunges.
  *
+ * @param windows the soak and, where the load came back into the band, what followed.
  * @returns null where the chart shows no quench: slow cooling, or an end before it.
  */
 export function quenchAfter(
   seconds: Float64Array,
   counted: readonly CountedChannel[],
+  windows: readonly Soak[],
+): Quench | null {
+  for (const [at, window] of windows.entries()) {
+    // A load that falls out of the band and comes back was not quenched between.
+    const found = window.ended ? quenchBehind(seconds, counted, window, windows[at + 1]?.from) : null;
+    if (found) return found;
+  }
+  return null;
+}
+
+function quenchBehind(
+  seconds: Float64Array,
+  counted: readonly CountedChannel[],
   soak: Soak,
+  nextFrom = seconds.length,
 ): Quench | null {
   const plunges = counted
-    .map(({ values }) => ({ values, row: plungeRow(seconds, values, soak) }))
+    .map(({ values }) => ({ values, row: plungeRow(seconds, values, soak, nextFrom) }))
     .filter(({ row }) => row >= 0);
   if (plunges.length === 0 || plunges.length * 2 <= counted.length) return null;
   const falls = plunges
@@ -52,11 +67,11 @@ export function quenchAfter(
 }
 
 /** The last row before the steep fall, -1 where there is none. */
-function plungeRow(seconds: Float64Array, values: Float64Array, soak: Soak): number {
+function plungeRow(seconds: Float64Array, values: Float64Array, soak: Soak, before: number): number {
   const from = Math.max(soak.from, soak.to - 1);
   const until = (seconds[soak.to] ?? 0) + SEARCHED_S;
   let [steepest, last] = [0, from];
-  for (let row = from; row + 1 < values.length && (seconds[row] ?? 0) <= until; row++) {
+  for (let row = from; row + 1 < before && (seconds[row] ?? 0) <= until; row++) {
     steepest = Math.max(steepest, fallRate(seconds, values, row));
     last = row + 1;
   }
