@@ -24,9 +24,13 @@ export function timeTicks(from: number, to: number, count: number, counts: Recor
   const step = TIME_STEPS.find((one) => one >= rough) ?? 2_592_000;
   return stepsOf(from, to, step).map((at) => ({
     at,
-    says: timeWordsAt(at, counts).replace(' after the start', ''),
+    says: timeTickWords(at, counts),
   }));
 }
+
+/** A time on an axis, which says once for all what it counts from. */
+export const timeTickWords = (at: number, counts: Recording['counts']): string =>
+  timeWordsAt(at, counts).replace(' after the start', '');
 
 const stepsOf = (from: number, to: number, step: number): number[] => {
   const first = Math.ceil(from / step);
