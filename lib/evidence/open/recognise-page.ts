@@ -10,7 +10,7 @@ import { resize } from './resize';
 
 /** Below this the letters of small print are too few pixels high. */
 const LEAST_DPI = 190;
-const GOOD_DPI = 270;
+const GOOD_DPI = 250;
 /** Words of a page that stands on its head are rubbish, and the recogniser knows. */
 const RUBBISH = 0.6;
 /** A word this doubtful under a stroke is the stroke misread. */

@@ -36,7 +36,7 @@ export function makeRecogniser(): Recogniser {
   return {
     async read(picture, { dpi, oneLine = false }) {
       const tesseract = await worker();
-      const wanted = oneLine ? PSM.SINGLE_LINE : PSM.AUTO;
+      const wanted = oneLine ? PSM.SINGLE_LINE : PSM.SINGLE_BLOCK;
       if (mode !== wanted) {
         await tesseract.setParameters({
           tessedit_pageseg_mode: wanted,

@@ -16,27 +16,78 @@ const THINNEST_AREA = 0.085;
 /** Print breaks up: so many white pixels do not end a line. */
 const GAP = 2;
 
+/** Of a line's length, the shares along which there must be ink, and thin ink: a row of letters has gaps and stems. */
+const ENOUGH = { ink: 0.82, thin: 0.62 };
+/** A line shorter than this could be the bar of a word in large type, and must be spotless. */
+const SHORT = 0.65;
+const SPOTLESS = { ink: 0.96, thin: 0.92 };
+
 /**
  * Finds the rules of a straightened page.
  *
  * Lines of tables spoil recognition, so their own ink is given for wiping off; a letter that crosses one keeps its ink.
  */
 export function findRules(ink: Ink, dpi: number): Rules {
-  const across = longRuns(ink, Math.round(SHORTEST_ACROSS * dpi));
   const turned = transpose(ink);
-  const down = longRuns(turned, Math.round(SHORTEST_DOWN * dpi));
-  const boxesAcross = gather(across);
-  const boxesDown = gather(down).map(([l, t, r, b]): PixelBox => [t, l, b, r]);
   const thickest = Math.max(3, Math.round(THICKEST * dpi));
-  const areas = boxesAcross.filter((box) => box[3] - box[1] >= THINNEST_AREA * dpi);
+  const across = bandsIn(ink, turned, { shortest: SHORTEST_ACROSS * dpi, thickest, dpi });
+  const down = bandsIn(turned, ink, { shortest: SHORTEST_DOWN * dpi, thickest, dpi });
+  const areas = across.others.filter((box) => box[3] - box[1] >= THINNEST_AREA * dpi);
+  const upended = down.lines.map(([l, t, r, b]): PixelBox => [t, l, b, r]);
   return {
-    lines: [
-      ...boxesAcross.filter((box) => box[3] - box[1] <= thickest + (box[2] - box[0]) * 0.01),
-      ...boxesDown.filter((box) => box[2] - box[0] <= thickest + (box[3] - box[1]) * 0.01),
-    ],
+    lines: [...across.lines, ...upended],
     areas,
-    ink: inkOfLines(ink, { turned, across, down, thickest }),
+    ink: inkOfLines(ink, { turned, across: across.lines, down: down.lines, thickest }),
   };
+}
+
+/** Long runs gathered into bands, parted into lines and the rest. `sideways` is the same ink, transposed. */
+function bandsIn(
+  ink: Ink,
+  sideways: Ink,
+  { shortest, thickest, dpi }: { shortest: number; thickest: number; dpi: number },
+): { lines: PixelBox[]; others: PixelBox[] } {
+  const lines: PixelBox[] = [];
+  const others: PixelBox[] = [];
+  for (const box of gather(longRuns(ink, Math.round(shortest)))) {
+    const narrow = box[3] - box[1] <= thickest + 2 + (box[2] - box[0]) * 0.01;
+    const wanted = box[2] - box[0] < SHORT * dpi ? SPOTLESS : ENOUGH;
+    if (narrow && isLine(sideways, box, { thickest, wanted })) lines.push(box);
+    else others.push(box);
+  }
+  return { lines, others };
+}
+
+function isLine(
+  sideways: Ink,
+  box: PixelBox,
+  { thickest, wanted }: { thickest: number; wanted: { readonly ink: number; readonly thin: number } },
+): boolean {
+  let [thin, inked, last] = [0, 0, -1];
+  eachRunWithin(sideways, box, (x, top, bottom) => {
+    if (x !== last) inked++;
+    if (x !== last && bottom - top <= thickest) thin++;
+    last = x;
+  });
+  return inked > wanted.ink * (box[2] - box[0]) && thin > wanted.thin * inked;
+}
+
+/** Calls `visit` for each run of ink that stands across the band at each place along it. */
+function eachRunWithin(
+  { width: depth, data }: Ink,
+  [left, top, right, bottom]: PixelBox,
+  visit: (x: number, from: number, to: number) => void,
+): void {
+  for (let x = left; x < right; x++) {
+    const line = x * depth;
+    for (let y = top; y < bottom; y++) {
+      if (data[line + y] === 0) continue;
+      let from = y;
+      while (from > 0 && data[line + from - 1] === 1) from--;
+      while (y + 1 < depth && data[line + y + 1] === 1) y++;
+      visit(x, from, y + 1);
+    }
+  }
 }
 
 interface Run {
@@ -45,14 +96,18 @@ interface Run {
   readonly to: number;
 }
 
+/** Each row is taken with its neighbours, so that the steps of a line that leans a little do not break it. */
 function longRuns({ width, height, data }: Ink, shortest: number): Run[] {
   const runs: Run[] = [];
   for (let row = 0; row < height; row++) {
     const line = row * width;
+    const above = row > 0 ? line - width : line;
+    const below = row < height - 1 ? line + width : line;
     let from = -1;
     let last = -1;
     for (let x = 0; x < width; x++) {
-      if (data[line + x] === 0) continue;
+      if (((data[line + x] as number) | (data[above + x] as number) | (data[below + x] as number)) === 0)
+        continue;
       if (from < 0 || x - last > GAP + 1) {
         if (from >= 0 && last + 1 - from >= shortest) runs.push({ row, from, to: last + 1 });
         from = x;
@@ -109,43 +164,33 @@ function gather(runs: readonly Run[]): PixelBox[] {
 
 function inkOfLines(
   ink: Ink,
-  { turned, across, down, thickest }: { turned: Ink; across: Run[]; down: Run[]; thickest: number },
+  {
+    turned,
+    across,
+    down,
+    thickest,
+  }: { turned: Ink; across: readonly PixelBox[]; down: readonly PixelBox[]; thickest: number },
 ): Ink {
-  const { width, height } = ink;
+  const { width, height, data } = ink;
   const out = new Uint8Array(width * height);
-  const wipe = (x: number, y: number) => {
-    out[y * width + x] = 1;
-  };
+  for (const box of across) {
+    eachRunWithin(turned, box, (x, from, to) => {
+      if (to - from <= thickest) for (let y = from; y < to; y++) out[y * width + x] = 1;
+    });
+  }
+  for (const box of down) {
+    eachRunWithin(ink, box, (y, from, to) => {
+      if (to - from <= thickest) out.fill(1, y * width + from, y * width + to);
+    });
+  }
   // Where two lines cross both are thick; that ink is a line's all the same.
-  const seen = new Uint8Array(width * height);
-  for (const { row, from, to } of across) seen.fill(1, row * width + from, row * width + to);
-  for (const { row, from, to } of down) {
-    for (let y = from; y < to; y++) {
-      if (seen[y * width + row] === 1) wipe(row, y);
+  for (const [left, top, right, bottom] of across) {
+    for (const [y0, x0, y1, x1] of down) {
+      for (let y = Math.max(top, y0); y < Math.min(bottom, y1); y++) {
+        for (let x = Math.max(left, x0); x < Math.min(right, x1); x++)
+          out[y * width + x] = data[y * width + x] as number;
+      }
     }
   }
-  markThin(turned, across, thickest, wipe);
-  markThin(ink, down, thickest, (x, y) => wipe(y, x));
   return { width, height, data: out };
-}
-
-/** Marks the ink of runs where, measured across them in `sideways`, it is no thicker than a line. */
-function markThin(
-  sideways: Ink,
-  runs: readonly Run[],
-  thickest: number,
-  mark: (x: number, y: number) => void,
-): void {
-  const { width: depth, data } = sideways;
-  for (const { row, from, to } of runs) {
-    for (let x = from; x < to; x++) {
-      const line = x * depth;
-      if (data[line + row] === 0) continue;
-      let top = row;
-      while (top > 0 && row - top <= thickest && data[line + top - 1] === 1) top--;
-      let bottom = row + 1;
-      while (bottom < depth && bottom - top <= thickest && data[line + bottom] === 1) bottom++;
-      if (bottom - top <= thickest) mark(x, row);
-    }
-  }
 }

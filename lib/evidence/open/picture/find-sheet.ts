@@ -96,7 +96,8 @@ function edgeStrength({ width, height, data }: Grey, inwards: 1 | -1): Float32Ar
   const strength = new Float32Array(width * height);
   for (let y = REACH; y < height - REACH; y++) {
     for (let x = 0; x < width; x++) {
-      const rise = ((data[(y + REACH) * width + x] as number) - (data[(y - REACH) * width + x] as number)) * inwards;
+      const rise =
+        ((data[(y + REACH) * width + x] as number) - (data[(y - REACH) * width + x] as number)) * inwards;
       strength[y * width + x] = rise < STEP / 2 ? 0 : Math.min(STRONGEST, rise);
     }
   }

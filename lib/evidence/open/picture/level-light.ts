@@ -3,9 +3,13 @@ import type { Grey } from './grey';
 /** A grey below this share of the page's paper is not paper in the shade but a dark area. */
 const DARKEST_PAPER = 0.35;
 const PAPER_SHARE = 0.88;
+/** Of the paper's brightness: from here on all is plain white, and up to here plain black. */
+const WHITE = 0.87;
+const BLACK = 0.16;
+const CONTRAST = 255 / (WHITE - BLACK);
 
 /**
- * Evens the light: paper becomes white wherever it lies, whether under a lamp, in a shadow or of a tint.
+ * Evens the light: paper becomes white wherever it lies, whether under a lamp, in a shadow or of a tint, and ink black.
  *
  * `tile` is the side in pixels of the squares whose paper is measured, about a quarter of an inch.
  */
@@ -42,8 +46,8 @@ export function levelLight(picture: Grey, tile: number): Grey {
       const c = left[x] as number;
       const f = share[x] as number;
       const ground = (line[c] as number) * (1 - f) + (line[c + 1] as number) * f;
-      const value = ((data[p] as number) * 255) / ground;
-      out[p] = value > 255 ? 255 : value;
+      const value = ((data[p] as number) / ground - BLACK) * CONTRAST;
+      out[p] = value > 255 ? 255 : Math.max(0, value);
     }
   }
   return { width, height, data: out };

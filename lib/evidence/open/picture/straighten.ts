@@ -30,7 +30,7 @@ const STRAIGHT_ENOUGH = 0.08;
 export function straighten(picture: Grey, dpi: number): Straightened {
   const factor = Math.max(1, Math.round(dpi / DPI_TO_LOOK));
   const small = shrink(picture, factor);
-  const ink = withoutLongRuns(findInk(small, Math.max(150, inkThreshold(small))), (dpi / factor) * 0.45);
+  const ink = withoutLongRuns(findInk(small, Math.max(140, inkThreshold(small))), (dpi / factor) * 0.45);
   const lie = findLie(ink);
   const quarter = lie.sideways ? 90 : 0;
   const skew = Math.abs(lie.skew) < STRAIGHT_ENOUGH ? 0 : lie.skew;

@@ -12,35 +12,77 @@ export function warp(
   toSource: Projection,
   { width, height }: { width: number; height: number },
 ): Grey {
-  const data = new Uint8Array(width * height);
+  const out = new Uint8Array(width * height).fill(PAPER);
   const [a, b, c, d, e, f, g, h, i] = toSource;
-  const flat = g === 0 && h === 0;
-  const from = source.data;
-  const stride = source.width;
-  const [right, bottom] = [source.width - 1, source.height - 1];
-  for (let y = 0, at = 0; y < height; y++) {
+  for (let y = 0; y < height; y++) {
     // The middle of a pixel is half a step from its corner.
     const v = y + 0.5;
-    for (let x = 0; x < width; x++, at++) {
-      const u = x + 0.5;
-      const w = flat ? 1 / i : 1 / (g * u + h * v + i);
-      const sx = (a * u + b * v + c) * w - 0.5;
-      const sy = (d * u + e * v + f) * w - 0.5;
-      if (!(sx > -1 && sy > -1 && sx < right + 1 && sy < bottom + 1)) {
-        data[at] = PAPER;
-        continue;
-      }
-      const x0 = Math.max(0, Math.min(right - 1, sx)) | 0;
-      const y0 = Math.max(0, Math.min(bottom - 1, sy)) | 0;
-      const fx = Math.min(1, Math.max(0, sx - x0));
-      const fy = Math.min(1, Math.max(0, sy - y0));
-      const p = y0 * stride + x0;
-      const q = bottom > 0 ? p + stride : p;
-      const step = right > 0 ? 1 : 0;
-      const top = (from[p] as number) * (1 - fx) + (from[p + step] as number) * fx;
-      const low = (from[q] as number) * (1 - fx) + (from[q + step] as number) * fx;
-      data[at] = top * (1 - fy) + low * fy + 0.5;
+    const start = { x: b * v + c + a * 0.5, y: e * v + f + d * 0.5, w: h * v + i + g * 0.5 };
+    if (g === 0 && h === 0)
+      drawFlatRow(source, out.subarray(y * width, (y + 1) * width), [start.x / i, start.y / i, a / i, d / i]);
+    else drawRow(source, out.subarray(y * width, (y + 1) * width), [start.x, start.y, start.w, a, d, g]);
+  }
+  return { width, height, data: out };
+}
+
+/** A row whose places in the source lie evenly: nothing is divided. */
+function drawFlatRow(
+  source: Grey,
+  row: Uint8Array,
+  [x0, y0, dx, dy]: readonly [number, number, number, number],
+): void {
+  const { data, width: stride } = source;
+  const [right, bottom] = [source.width - 1, source.height - 1];
+  for (let k = 0; k < row.length; k++) {
+    const x = x0 + k * dx - 0.5;
+    const y = y0 + k * dy - 0.5;
+    if (x >= 0 && y >= 0 && x < right && y < bottom) {
+      const left = x | 0;
+      const top = y | 0;
+      const p = top * stride + left;
+      const fx = x - left;
+      const fy = y - top;
+      const upper = (data[p] as number) + fx * ((data[p + 1] as number) - (data[p] as number));
+      const q = p + stride;
+      const lower = (data[q] as number) + fx * ((data[q + 1] as number) - (data[q] as number));
+      row[k] = upper + fy * (lower - upper) + 0.5;
+    } else {
+      row[k] = atRim(source, x, y);
     }
   }
-  return { width, height, data };
+}
+
+function drawRow(
+  source: Grey,
+  row: Uint8Array,
+  [x0, y0, w0, dx, dy, dw]: readonly [number, number, number, number, number, number],
+): void {
+  const { data, width: stride } = source;
+  const [right, bottom] = [source.width - 1, source.height - 1];
+  for (let k = 0; k < row.length; k++) {
+    const w = 1 / (w0 + k * dw);
+    const x = (x0 + k * dx) * w - 0.5;
+    const y = (y0 + k * dy) * w - 0.5;
+    if (x >= 0 && y >= 0 && x < right && y < bottom) {
+      const left = x | 0;
+      const top = y | 0;
+      const p = top * stride + left;
+      const fx = x - left;
+      const fy = y - top;
+      const upper = (data[p] as number) + fx * ((data[p + 1] as number) - (data[p] as number));
+      const q = p + stride;
+      const lower = (data[q] as number) + fx * ((data[q + 1] as number) - (data[q] as number));
+      row[k] = upper + fy * (lower - upper) + 0.5;
+    } else {
+      row[k] = atRim(source, x, y);
+    }
+  }
+}
+
+/** Half a pixel along its rim the source is still seen. */
+function atRim({ width, height, data }: Grey, x: number, y: number): number {
+  if (!(x > -1 && y > -1 && x < width && y < height)) return PAPER;
+  const left = Math.min(width - 1, Math.max(0, Math.round(x)));
+  const top = Math.min(height - 1, Math.max(0, Math.round(y)));
+  return data[top * width + left] as number;
 }
