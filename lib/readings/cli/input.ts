@@ -1,7 +1,7 @@
 import { readFile } from 'node:fs/promises';
 import { basename } from 'node:path';
 import { parseArgs } from 'node:util';
-import { z } from 'zod';
+import type { z } from 'zod';
 
 /** The command was called wrongly, or something that was handed to it is not what it should be. */
 export class InputError extends Error {

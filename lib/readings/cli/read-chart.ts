@@ -1,7 +1,7 @@
 import { printResult } from './command';
 
 import { JudgedChart, Understood, UnderstoodChannel } from '@/lib/evidence/chart/judged-chart';
-import { judgeChart } from '@/lib/evidence/chart/judge-chart';
+import { readChart } from '@/lib/evidence/chart/read-chart';
 import { ChartRequirement } from '@/lib/evidence/chart/requirement';
 
 import { bytesOf, callOf, InputError, numberOf } from './input';
@@ -35,10 +35,13 @@ await printResult(async (args) => {
     soakMinutesMax: numberOf('soak-minutes-max', options['soak-minutes-max']),
     maxQuenchDelayS: numberOf('max-quench-delay-s', options['max-quench-delay-s']),
   });
+  const missing = (['set', 'tolerance', 'unit'] as const).filter((name) => options[name] === undefined);
+  if (missing.length > 0)
+    throw new InputError('usage', `${missing.map((name) => `--${name}`).join(', ')} missing. ${USAGE}`);
   if (!requirement.success) {
     const [issue] = requirement.error.issues;
     throw new InputError('usage', `--${issue?.path.join('.') ?? ''}: ${issue?.message ?? ''}. ${USAGE}`);
   }
   const { bytes } = await bytesOf(file);
-  return PrintedChart.parse(judgeChart(bytes, requirement.data));
+  return PrintedChart.parse(readChart(bytes, requirement.data));
 });
