@@ -73,8 +73,9 @@ export const isGrowing = ({ values }: Column): boolean =>
   values.every((value, at) => at === 0 || value >= (values[at - 1] ?? value)) &&
   (values[values.length - 1] ?? 0) > (values[0] ?? 0);
 
-/** Whole numbers one after the other: the number of the row. */
-export const isCounting = ({ values }: Column): boolean =>
+/** Whole numbers one after the other, from the beginning or in the first column: the number of the row. */
+export const isCounting = ({ at, values }: Column): boolean =>
   values.length >= 3 &&
-  values.filter((value, at) => at > 0 && value - (values[at - 1] ?? value) === 1).length >=
+  (at === 0 || values[0] === 0 || values[0] === 1) &&
+  values.filter((value, row) => row > 0 && value - (values[row - 1] ?? value) === 1).length >=
     (values.length - 1) * 0.9;
