@@ -19,6 +19,30 @@ const NUMBERS: Record<Spot['verdict'], string> = {
   to_decide: 'bg-quiet text-paper',
 };
 
+/** Where the number stands beside its box. */
+const SIDES = {
+  right: 'top-[-2px] left-full h-[calc(100%+4px)]',
+  left: 'top-[-2px] right-full h-[calc(100%+4px)]',
+  above: 'bottom-full left-[-2px]',
+  below: 'top-full left-[-2px]',
+} as const;
+/** About as wide and high as a number is drawn, in points. */
+const NUMBER = 16;
+
+/** The first side on which the number lies over no print. */
+function freeSide([left, top, right, bottom]: Spot['box'], { words }: KeptPage): keyof typeof SIDES {
+  const places: Record<keyof typeof SIDES, Spot['box']> = {
+    right: [right + 3, top, right + NUMBER, bottom],
+    left: [left - NUMBER, top, left - 3, bottom],
+    above: [left, top - NUMBER, left + NUMBER, top - 3],
+    below: [left, bottom + 3, left + NUMBER, bottom + NUMBER],
+  };
+  const isFree = ([l, t, r, b]: Spot['box']) =>
+    !words.some(([, wl, wt, wr, wb]) => wl < r && wr > l && wt < b && wb > t);
+  const sides = Object.keys(places) as (keyof typeof SIDES)[];
+  return sides.find((side) => isFree(places[side])) ?? 'right';
+}
+
 export interface PageSpotsProps {
   page: KeptPage;
   spots: readonly Spot[];
@@ -62,7 +86,7 @@ export function PageSpots({ page, spots, selected, numberOf, onRow, onWords }: P
             onClick={() => onRow(spot.row)}
           >
             <span
-              className={`num absolute top-[-2px] left-full flex h-[calc(100%+4px)] min-h-[15px] min-w-[17px] items-center justify-center px-1 text-[0.68rem] font-bold ${NUMBERS[spot.verdict]}`}
+              className={`num absolute flex min-h-[15px] min-w-[17px] items-center justify-center px-1 text-[0.68rem] font-bold ${SIDES[freeSide(spot.box, page)]} ${NUMBERS[spot.verdict]}`}
             >
               {numberOf(spot.row)}
             </span>

@@ -5,6 +5,7 @@ import { useEffect, type ReactNode } from 'react';
 import { Button } from '@/components/ui/button';
 
 import { PageSpots, type PageSpotsProps } from './page-spots';
+import { WordsPage } from './words-page';
 import { usePaging, type Paging } from './use-paging';
 import { useElementWidth } from './use-width';
 
@@ -37,6 +38,11 @@ export function PageViewer({ file, title, facts, choice, read }: PageViewerProps
   const paging = usePaging();
   useTurnToLit(paging, read);
   const kept = read?.pages.find(({ number }) => number === paging.page);
+  useEffect(() => {
+    // A mail or a text has as many pages as its reader made of it.
+    if (!isDrawn(file) && read && read.pages.length > 0) paging.setPages(read.pages.length);
+    // eslint-disable-next-line react-hooks/exhaustive-deps -- the setter is the same at every draw
+  }, [file, read?.pages.length]);
   const { element, width } = useElementWidth<HTMLDivElement>();
   const url = `/api/files/${file.id}/content?inline=1`;
   const drawn = Math.max(200, Math.floor((width - 36) * paging.zoom));
@@ -77,11 +83,14 @@ export function PageViewer({ file, title, facts, choice, read }: PageViewerProps
                 className="h-auto max-w-none"
               />
             )}
-            {file.mediaType !== 'application/pdf' && !file.mediaType.startsWith('image/') && (
-              <p className="p-6">
-                This file cannot be shown here. <a href={`/api/files/${file.id}/content`}>Save it</a>
-              </p>
-            )}
+            {!isDrawn(file) &&
+              (kept ? (
+                <WordsPage page={kept} width={drawn} />
+              ) : (
+                <p className="p-6">
+                  This file cannot be shown here. <a href={`/api/files/${file.id}/content`}>Save it</a>
+                </p>
+              ))}
             {read && kept && paging.turned === 0 && isDrawnUpright(file, kept) && (
               <PageSpots {...read} page={kept} />
             )}
@@ -92,9 +101,12 @@ export function PageViewer({ file, title, facts, choice, read }: PageViewerProps
   );
 }
 
+const isDrawn = ({ mediaType }: ViewedFile): boolean =>
+  mediaType === 'application/pdf' || mediaType.startsWith('image/');
+
 /** A picture that was turned or straightened to be read has its words elsewhere than the picture shown. */
 const isDrawnUpright = (file: ViewedFile, page: PageSpotsProps['page']): boolean =>
-  file.mediaType === 'application/pdf' || page.turned === 0;
+  !file.mediaType.startsWith('image/') || page.turned === 0;
 
 /** The page on which the selected row stands comes up when the row is selected. */
 function useTurnToLit({ page, toPage }: Paging, read: Read | undefined) {

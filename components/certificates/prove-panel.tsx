@@ -17,8 +17,8 @@ import type { Proving } from './use-proving';
 
 const COLUMNS = [
   { says: 'Number of the row', hidden: true, className: 'w-7' },
-  { says: 'Must be proved', className: 'w-[25%]' },
-  { says: 'Ordered', className: 'w-[23%]' },
+  { says: 'Must be proved', className: 'w-[24%]' },
+  { says: 'Ordered', className: 'w-[21%]' },
   { says: 'As stated', className: 'w-[17%]' },
   { says: 'How well', className: 'w-14 max-md:hidden' },
   { says: 'Verdict' },

@@ -1,4 +1,5 @@
 'use client';
+import Link from 'next/link';
 import { useState } from 'react';
 
 import { Button } from '@/components/ui/button';
@@ -57,11 +58,18 @@ function Viewed({ proving }: { proving: Proving }) {
       )}
       {data.charts
         .filter((one) => one.id !== chartId)
-        .map((one) => (
-          <Button key={one.id} look="word" onClick={() => setChartId(one.id)}>
-            Chart {one.fileName}
-          </Button>
-        ))}
+        .map((one) =>
+          // A recorder's table is drawn on a page of its own; a chart on paper is looked at here.
+          isTable(one) ? (
+            <Link key={one.id} href={`/charts/${one.id}`} className="lw-word-button">
+              Chart {one.fileName}
+            </Link>
+          ) : (
+            <Button key={one.id} look="word" onClick={() => setChartId(one.id)}>
+              Chart {one.fileName}
+            </Button>
+          ),
+        )}
     </span>
   );
   const read = {
@@ -83,3 +91,5 @@ function Viewed({ proving }: { proving: Proving }) {
     />
   );
 }
+
+const isTable = ({ mediaType }: { mediaType: string }): boolean => mediaType.startsWith('text/');

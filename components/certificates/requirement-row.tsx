@@ -89,7 +89,7 @@ function YourPart({
   requirement: ProvedRequirement;
   isProposed: boolean;
 }) {
-  if (!decision) return isProposed && <strong>to confirm</strong>;
+  if (!decision) return isProposed && <strong className="whitespace-nowrap">to confirm</strong>;
   if (decision.sealed) return <span className="text-quiet">signed</span>;
   return <span className="text-quiet">{decision.overrideReason ? 'overridden' : 'decided'}</span>;
 }

@@ -15,6 +15,8 @@ import { statedOn } from './stated-on';
 interface Paper {
   name: string;
   content: Buffer;
+  /** A PDF where it is not said. */
+  mediaType?: string;
 }
 
 /** What a processor reads off the order when it writes its papers. */
@@ -72,14 +74,14 @@ export async function certificateOf(
     title: 'Certificate of conformance',
     from: { name: given.processor.name, address: 'Works Road, Tamarack Junction' },
     facts: [
-      ['Certificate', number],
+      ['Certificate no.', number],
       ['Date', dayOf(ctx.now)],
       ['Purchase order', batch.orderNumber],
       ['Customer', batch.shop],
       ['Traveller', batch.number],
       ['Process', PROCESS_WORDS[batch.process]],
       ['Specification', [batch.specification, batch.specificationRevision].filter(Boolean).join(' rev ')],
-      ['Class, type', batch.classType ?? ''],
+      ['Class / type', batch.classType ?? ''],
     ],
     columns: ['Part number', 'Rev', 'Description', 'Lot', 'Quantity'],
     lines: batch.lines.map((line, at) => ({
@@ -197,6 +199,11 @@ export async function keepPaper(
     .where(eq(batches.id, batchId));
   if (!batch) throw new Error('a batch of the story is gone');
   return inOwningShop(ctx, batch.shopId, (inner) =>
-    keepFile(inner, { ...paper, mediaType: 'application/pdf', batchId, processorId: batch.processorId }),
+    keepFile(inner, {
+      ...paper,
+      mediaType: paper.mediaType ?? 'application/pdf',
+      batchId,
+      processorId: batch.processorId,
+    }),
   );
 }

@@ -71,7 +71,9 @@ const PRESENT: readonly Campaign[] = [
       ['MC-1102-03', 4],
       ['MC-1102-04', 4],
     ],
-    steps: [plot({ ...out, promises: [12], shippedAfter: 11, receivedAfter: 13, papersAfter: 13 })],
+    steps: [
+      plot({ ...out, promises: [12], shippedAfter: 11, receivedAfter: 13, papersAfter: 13, soakedMin: 38 }),
+    ],
   },
   // A certificate for 40 of 41 pieces, signed for 40.
   {

@@ -51,16 +51,25 @@ const VERDICT = {
 } as const;
 
 /** What every certificate is asked for beside figures: how shops word it, what speaks against it, where it stands. */
-const PAPERS: readonly { characteristic: RegExp; against: RegExp; fields: RegExp }[] = [
+interface PaperForm {
+  characteristic: RegExp;
+  against: RegExp;
+  fields: RegExp;
+  /** Those of the fields whose reading decides; all of them where it is not said. */
+  decide?: RegExp;
+}
+
+const PAPERS: readonly PaperForm[] = [
   {
     characteristic: /order|revision|part number/i,
     against: /^(wrong_po|wrong_batch|part_number_|revision_mismatch)/,
-    fields: /^purchase_order$|^lines\[\d+\]\.(part_number|rev)$/,
+    fields: /^purchase_order$|^lines\[own\]\.(part_number|rev)$/,
   },
   {
     characteristic: /signature|signed/i,
     against: /^signature_missing$/,
     fields: /^(signature_present|signed_by|signer_title|certificate_date)$/,
+    decide: /^(signature_present|certificate_date)$/,
   },
   {
     characteristic: /conformance|statement/i,
@@ -85,7 +94,8 @@ export function propose({ order, requirements }: BatchOrder, compared: Compared)
   const proposals = outcomes.flatMap(({ group, verdicts }) =>
     group.requirements.flatMap((requirement): Proposal[] => {
       const { figures } = requirement;
-      if (!figures) return paperProposal(requirement, discrepancies, facts);
+      if (!figures)
+        return paperProposal(requirement, discrepancies, ownLines(facts, order, requirement.lineNo));
       const verdict = verdicts.find(
         (one) =>
           figures.answeredBy.test(one.requirement) && (one.line === null || one.line === requirement.lineNo),
@@ -149,9 +159,26 @@ function paperProposal(
       verdict: against ? 'does_not_meet' : own.length > 0 ? 'meets' : 'not_stated',
       why: against?.message ?? '',
       facts: own,
-      confidence: weakest(facts, own),
+      confidence: weakest(facts, paper.decide ? placesOf(facts, paper.decide) : own),
     }),
   ];
+}
+
+/** The facts with the lines that are of this line of the order named so; of the whole batch all are. */
+function ownLines(facts: readonly Fact[], { lines }: Order, lineNo: number | null): Fact[] {
+  const part = lines.find(({ line }) => line === lineNo)?.part_number;
+  const own = new Set(
+    facts.flatMap(({ field, value }) => {
+      const at = /^lines\[(\d+)\]\.part_number$/.exec(field)?.[1];
+      return at !== undefined && (part === undefined || value === part) ? [at] : [];
+    }),
+  );
+  return facts.map((fact) => ({
+    ...fact,
+    field: fact.field.replace(/^lines\[(\d+)\]/, (counted, at: string) =>
+      own.has(at) ? 'lines[own]' : counted,
+    ),
+  }));
 }
 
 /** What was read poorly is never proposed as met. */
