@@ -107,7 +107,10 @@ function overshootFindings({
 function quenchFindings({ requirement, quench, quenchDelayS }: Seen): Finding[] {
   const allowed = requirement.maxQuenchDelayS;
   if (allowed === undefined) return [];
-  if (quenchDelayS === null) return [['doubts', 'The chart shows no quench, so its delay cannot be told.']];
+  if (quenchDelayS === null) {
+    const shown = quench ? 'the plunge into the quench but not the transfer to it' : 'no quench';
+    return [['doubts', `The chart shows ${shown}, so its delay cannot be told.`]];
+  }
   const says = `From the first fall to the plunge it took ${durationWords(quenchDelayS)}; ${allowed} s were allowed.`;
   const step = quench?.delayS === quenchDelayS ? quench.stepS : 0;
   // Rows further apart than what is allowed cannot show that it was kept.

@@ -37,7 +37,12 @@ export function seenIn(recording: Recording, requirement: ChartRequirement): See
   const { seconds } = recording;
   const band = bandOverTime(seconds.length, counted);
   const { soak } = band;
-  const quench = soak && quenchAfter(seconds, counted, [soak, ...band.later]);
+  const furnace = examined
+    .filter(
+      ({ channel, isCandidate, excluded }) => channel.role === 'control' && !isCandidate && excluded === null,
+    )
+    .map(({ values }) => values);
+  const quench = soak && quenchAfter(seconds, counted, { windows: [soak, ...band.later], furnace });
   return {
     recording,
     requirement,
@@ -49,18 +54,13 @@ export function seenIn(recording: Recording, requirement: ChartRequirement): See
       counted.map(({ values }) => values),
     ),
     quench,
-    quenchDelayS: statedDelay(recording) ?? visibleDelay(quench),
+    quenchDelayS:
+      statedDelay(recording) ?? (quench?.delayS == null ? null : Math.round(quench.delayS * 10) / 10),
     hottest: hottestOf(counted, requirement),
     soakS: soak ? (seconds[soak.to] ?? 0) - (seconds[soak.from] ?? 0) : 0,
     secondsAbove: secondsWhere(seconds, band.isAbove),
   };
 }
-
-/** A fall and a plunge within one long step of the recorder show no delay. */
-const COARSEST_S = 60;
-
-const visibleDelay = (quench: Quench | null): number | null =>
-  quench && (quench.delayS > 0 || quench.stepS <= COARSEST_S) ? Math.round(quench.delayS * 10) / 10 : null;
 
 function hottestOf(counted: readonly Examined[], { unit }: ChartRequirement): Seen['hottest'] {
   let [row, degrees] = [-1, Number.NEGATIVE_INFINITY];
