@@ -1,6 +1,6 @@
 import { faultFlags, gapFlags, lateFlags, overshootFlags } from './flags';
 import { furtherFacts } from './further-facts';
-import { gapsOf } from './gaps';
+import { gapsOf, readingGaps } from './gaps';
 import { findingsOf, type Findings } from './findings';
 import type { ChartFlag, JudgedChart } from './judged-chart';
 import { degreesIn } from './limits';
@@ -21,6 +21,8 @@ export interface Seen {
   readonly band: BandOverTime;
   readonly soak: Soak | null;
   readonly gaps: readonly Run[];
+  /** Where single ones of the counted have no reading while the others have. */
+  readonly ownGaps: readonly { readonly channel: string; readonly run: Run }[];
   readonly quench: Quench | null;
   /** As a remark of the recorder says it, before what the temperatures show. */
   readonly quenchDelayS: number | null;
@@ -37,6 +39,10 @@ export function seenIn(recording: Recording, requirement: ChartRequirement): See
   const { seconds } = recording;
   const band = bandOverTime(seconds.length, counted);
   const { soak } = band;
+  const gaps = gapsOf(
+    seconds,
+    counted.map(({ values }) => values),
+  );
   const furnace = examined
     .filter(
       ({ channel, isCandidate, excluded }) => channel.role === 'control' && !isCandidate && excluded === null,
@@ -49,9 +55,11 @@ export function seenIn(recording: Recording, requirement: ChartRequirement): See
     examined,
     band,
     soak,
-    gaps: gapsOf(
-      seconds,
-      counted.map(({ values }) => values),
+    gaps,
+    ownGaps: counted.flatMap(({ channel }) =>
+      readingGaps(seconds, channel.values)
+        .filter((run) => !gaps.some(({ from, to }) => from <= run.from && to >= run.to))
+        .map((run) => ({ channel: channel.name, run })),
     ),
     quench,
     quenchDelayS:
@@ -137,7 +145,7 @@ function understoodOf({ recording, examined }: Seen): JudgedChart['understood'] 
 }
 
 function flagsOf(seen: Seen): ChartFlag[] {
-  const { recording, requirement, examined, soak, gaps, soakS } = seen;
+  const { recording, requirement, examined, soak, gaps, ownGaps, soakS } = seen;
   const asked = requirement.soakMinutes;
   const isShort = asked !== undefined && soakS / 60 < asked && examined.some(isCounted);
   const short: ChartFlag[] = isShort
@@ -154,7 +162,7 @@ function flagsOf(seen: Seen): ChartFlag[] {
   return [
     ...short,
     ...examined.filter(isCounted).flatMap((one) => overshootFlags(seen, one)),
-    ...gapFlags(seen, gaps),
+    ...gapFlags(seen, [...gaps.map((run) => ({ channel: null, run })), ...ownGaps]),
     ...examined.flatMap((one) => faultFlags(seen, one)),
     ...lateFlags(seen, examined),
   ];

@@ -122,6 +122,37 @@ describe('odd ways of writing', () => {
     expect([read.quench_delay_s, read.verdict]).toEqual([null, 'review']);
   });
 
+  test('a thermocouple without readings inside the soak makes it a review', () => {
+    const rows = (empty: (s: number) => boolean) =>
+      bytes(
+        [
+          'Time (s),TC1,TC2',
+          ...Array.from({ length: 400 }, (_, s) => `${s},920.5,${empty(s) ? '' : 919}`),
+        ].join('\n'),
+      );
+    const read = readChart(
+      rows((s) => s > 100 && s < 160),
+      ASKED,
+    );
+    expect([read.verdict, read.flags.map(({ code, channel }) => [code, channel])]).toEqual([
+      'review',
+      [['gap', 'TC2']],
+    ]);
+    expect(
+      readChart(
+        rows((s) => s > 250),
+        ASKED,
+      ).verdict,
+    ).toBe('review');
+    // Written in every other row, it is all there.
+    expect(
+      readChart(
+        rows((s) => s % 2 === 1),
+        ASKED,
+      ),
+    ).toMatchObject({ verdict: 'pass', flags: [] });
+  });
+
   test('a long file that counts from zero is read to its end', () => {
     for (const count of [2000, 5000, 8000, 20_000]) {
       const rows = Array.from({ length: count }, (_, s) => `${s * 2},${900 + (s % 7)}.5,${905 + (s % 5)}.5`);
