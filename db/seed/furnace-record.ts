@@ -30,5 +30,5 @@ function coupleAt(second: number, { rate, out }: { rate: number; out: number }):
   const heated = SET_F - (SET_F - COLD_F) * Math.exp(-rate * Math.pow(second / 60, 1.22));
   if (second < out) return heated;
   if (second < out + QUENCH_S) return heated - 3 * (second - out + EVERY_S);
-  return WATER_F + (heated - WATER_F) * Math.exp(-(second - out - QUENCH_S) / 9);
+  return WATER_F + (heated - 3 * QUENCH_S - WATER_F) * Math.exp(-(second - out - QUENCH_S + EVERY_S) / 9);
 }
