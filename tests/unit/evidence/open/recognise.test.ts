@@ -1,4 +1,4 @@
-import { PDFDocument, TextRenderingMode, setTextRenderingMode } from 'pdf-lib';
+import { PDFDocument, rgb, TextRenderingMode, setTextRenderingMode } from 'pdf-lib';
 import { afterAll, describe, expect, test } from 'vitest';
 import { openFile } from '@/lib/evidence/open/open-file';
 import { project } from '@/lib/evidence/open/picture/projection';
@@ -20,11 +20,12 @@ const LINES = [
 ];
 const draw: Parameters<typeof makePdf>[0] = (page, font) => {
   LINES.forEach((line, i) => page.drawText(line, { x: 80, y: 690 - i * 30, size: 13, font }));
-  page.drawRectangle({ x: 70, y: 600, width: 400, height: 80, borderWidth: 1 });
+  page.drawRectangle({ x: 70, y: 600, width: 400, height: 80, borderWidth: 1, borderColor: rgb(0, 0, 0) });
   page.drawSvgPath('M0 0 C 20 -40 30 30 50 -10 S 80 20 110 -5 S 130 10 160 -20', {
     x: 100,
     y: 420,
     borderWidth: 1.2,
+    borderColor: rgb(0, 0, 0.3),
   });
 };
 
