@@ -18,7 +18,7 @@ export async function openDocument(
   { password, limits }: { password?: string | undefined; limits: Limits },
 ): Promise<PDFDocumentProxy> {
   const task = getDocument({
-    // pdf.js takes the bytes over, so it is given its own; of a Buffer it will not have them.
+    // pdf.js takes the bytes over, so it is given its own.
     data: new Uint8Array(bytes),
     ...(password === undefined ? {} : { password }),
     verbosity: VerbosityLevel.ERRORS,
