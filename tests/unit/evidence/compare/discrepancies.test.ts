@@ -351,6 +351,7 @@ const RIGHT: Case[] = [
   ],
   ['a number without its dash', HEAT, lines(HEAT, { part_number: '10200' })],
   ['letters for digits', HEAT, lines(HEAT, { part_number: '1O-2OO' })],
+  ['a revision recognised twice', HEAT, lines(HEAT, { rev: 'AA' }), { file: { ...FILE, recognised: true } }],
   ['a revision in words', HEAT, lines(HEAT, { rev: 'Rev. A' })],
   ['a revision that is not stated', HEAT, lines(HEAT, { rev: null })],
   ['honest rejects', HEAT, lines(HEAT, { qty_accepted: 10, qty_rejected: 2 })],
