@@ -1,0 +1,128 @@
+import { PDFDocument, rgb, StandardFonts, type PDFFont, type PDFPage } from 'pdf-lib';
+
+export type Face = 'Helvetica' | 'Times' | 'Courier';
+
+const FACES: Record<Face, readonly [StandardFonts, StandardFonts]> = {
+  Helvetica: [StandardFonts.Helvetica, StandardFonts.HelveticaBold],
+  Times: [StandardFonts.TimesRoman, StandardFonts.TimesRomanBold],
+  Courier: [StandardFonts.Courier, StandardFonts.CourierBold],
+};
+
+export interface TextStyle {
+  readonly size?: number;
+  readonly bold?: boolean;
+  readonly align?: 'left' | 'centre' | 'right';
+  readonly grey?: number;
+}
+
+/** A PDF being written from top to bottom; places are in points from the upper left corner. */
+export class Paper {
+  private page: PDFPage;
+  y = 0;
+
+  private constructor(
+    private readonly document: PDFDocument,
+    private readonly fonts: readonly [PDFFont, PDFFont],
+    readonly width: number,
+    readonly height: number,
+    readonly size: number,
+  ) {
+    this.page = document.addPage([width, height]);
+  }
+
+  static async open(face: Face, size: number, [width, height]: readonly [number, number]): Promise<Paper> {
+    const document = await PDFDocument.create();
+    const when = new Date('2026-01-01T00:00:00Z');
+    document.setCreationDate(when);
+    document.setModificationDate(when);
+    const [plain, bold] = FACES[face];
+    return new Paper(
+      document,
+      [await document.embedFont(plain), await document.embedFont(bold)],
+      width,
+      height,
+      size,
+    );
+  }
+
+  turnPage(): void {
+    this.page = this.document.addPage([this.width, this.height]);
+    this.y = 40;
+  }
+
+  widthOf(text: string, { size = this.size, bold = false }: TextStyle = {}): number {
+    return this.fonts[bold ? 1 : 0].widthOfTextAtSize(text, size);
+  }
+
+  /** Text whose letters stand on `y`. */
+  text(text: string, x: number, y: number, style: TextStyle = {}): void {
+    const { size = this.size, bold = false, align = 'left', grey = 0 } = style;
+    const wide = this.widthOf(text, style);
+    const left = align === 'left' ? x : align === 'right' ? x - wide : x - wide / 2;
+    this.page.drawText(text, {
+      x: left,
+      y: this.height - y,
+      size,
+      font: this.fonts[bold ? 1 : 0],
+      color: rgb(grey, grey, grey),
+    });
+  }
+
+  /** Text broken into lines; moves down. */
+  prose(text: string, x: number, width: number, style: TextStyle = {}): void {
+    const size = style.size ?? this.size;
+    let line = '';
+    for (const word of text.split(' ')) {
+      const longer = line === '' ? word : `${line} ${word}`;
+      if (this.widthOf(longer, style) > width && line !== '') {
+        this.text(line, x, this.y, style);
+        this.y += size * 1.3;
+        line = word;
+      } else line = longer;
+    }
+    this.text(line, x, this.y, style);
+    this.y += size * 1.3;
+  }
+
+  rule(x1: number, y1: number, x2: number, y2: number, thickness = 0.6): void {
+    this.page.drawLine({
+      start: { x: x1, y: this.height - y1 },
+      end: { x: x2, y: this.height - y2 },
+      thickness,
+    });
+  }
+
+  frame(x: number, y: number, width: number, height: number): void {
+    this.page.drawRectangle({
+      x,
+      y: this.height - y - height,
+      width,
+      height,
+      borderWidth: 0.7,
+      borderColor: rgb(0, 0, 0),
+    });
+  }
+
+  shade(x: number, y: number, width: number, height: number): void {
+    this.page.drawRectangle({ x, y: this.height - y - height, width, height, color: rgb(0.9, 0.9, 0.9) });
+  }
+
+  /** What a pen leaves on a line that begins at `x` and `y`. */
+  sign(x: number, y: number, seed: number): void {
+    const strokes = Array.from({ length: 7 }, (_, step) => {
+      const across = 12 + ((seed >> step) % 5);
+      const up = 6 + ((seed * (step + 3)) % 11);
+      return `q ${across / 2} ${step % 2 === 0 ? -up : up} ${across} ${step % 2 === 0 ? 2 : -2}`;
+    });
+    this.page.drawSvgPath(`M 0 0 ${strokes.join(' ')}`, {
+      x,
+      y: this.height - y + 4,
+      borderWidth: 1.2,
+      borderColor: rgb(0.1, 0.1, 0.45),
+    });
+  }
+
+  save(): Promise<Uint8Array> {
+    return this.document.save();
+  }
+}
