@@ -3,7 +3,7 @@ import type { Component } from './picture/find-components';
 import { toGrey, type Coloured } from './picture/colours';
 import { findSheet, type Corners } from './picture/find-sheet';
 import { findStamps } from './picture/find-stamps';
-import type { Grey, PixelBox } from './picture/grey';
+import type { Grey, Ink, PixelBox } from './picture/grey';
 import { levelLight } from './picture/level-light';
 import { chainProjections, SAME_PLACE, type Projection } from './picture/projection';
 import { rectify } from './picture/rectify';
@@ -29,6 +29,7 @@ export interface Prepared {
   /** Text alone. */
   readonly text: Grey;
   readonly rules: readonly PixelBox[];
+  readonly ink: Ink;
   readonly components: readonly Component[];
   readonly stamps: readonly PixelBox[];
   readonly hands: readonly PixelBox[];
@@ -79,8 +80,8 @@ export function prepareAgain(page: Prepared, straight: Straightened): Prepared {
 }
 
 function cleaned({ picture }: Straightened, dpi: number) {
-  const { picture: text, rules, components } = cleanPage(picture, dpi);
-  return { text, rules, components };
+  const { picture: text, rules, ink, components } = cleanPage(picture, dpi);
+  return { text, rules, ink, components };
 }
 
 const onPage = (boxes: readonly PixelBox[] | undefined, projection: Projection) =>

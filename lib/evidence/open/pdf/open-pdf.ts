@@ -7,6 +7,7 @@ import { quarterTurn } from '../picture/projection';
 import { preparePage, type Prepared } from '../prepare-page';
 import { recognisePage } from '../recognise-page';
 import type { Recogniser } from '../recogniser';
+import { coarsen } from '../resize';
 import { refuseBrokenPdf } from './check-pdf';
 import { asUnreadable, openDocument } from './open-document';
 import { pictureOfPage, shareCovered } from './page-picture';
@@ -77,9 +78,8 @@ function isTextToTrust({ page, drawn, readable }: DescribedPage): boolean {
 
 async function prepare(proxy: PDFPageProxy, described: DescribedPage, limits: Limits): Promise<Prepared> {
   const { drawn, box } = described.describeUnturned();
-  return preparePage(
-    await within(limits.millisecondsPerPage, limits.signal, pictureOfPage(proxy, drawn, box)),
-  );
+  const picture = pictureOfPage(proxy, drawn, box).then(coarsen);
+  return preparePage(await within(limits.millisecondsPerPage, limits.signal, picture));
 }
 
 async function read(
