@@ -5,7 +5,10 @@ import { join } from 'node:path';
 import { afterAll, beforeAll, expect, test } from 'vitest';
 
 import { ReadInvoice } from '@/lib/evidence/invoice/invoice';
+import { Order } from '@/lib/evidence/order';
 import { PrintedCertificate } from '@/lib/readings/cli/certificate-document';
+
+import { bytesOf, callOf, jsonOf, numberOf } from '@/lib/readings/cli/input';
 
 import { heatTreat, plating } from '../compare/agreeing-certificate';
 import { american } from '../invoice/invoice-layouts';
@@ -105,42 +108,52 @@ test('a certificate is read, matched to one of the open orders and compared', as
   expect(read.discrepancies.map(({ code }) => code)).toContain('old_spec_revision');
 });
 
-const order = (content: unknown) =>
-  put('order.json', typeof content === 'string' ? content : JSON.stringify(content));
-
 test.each<[string, () => Promise<Parameters<typeof run>>, string]>([
-  ['no file', async () => ['chart', ...REQUIREMENT], 'usage'],
-  [
-    'an option that is missing',
-    async () => ['chart', await put('chart.csv', CHART), '--set', '920'],
-    'usage',
-  ],
-  ['an option that nobody knows', async () => ['invoice', 'x.pdf', '--colour', 'red'], 'usage'],
-  ['a file that is not there', async () => ['invoice', join(folder, 'none.pdf')], 'file_not_found'],
+  ['options that are missing', async () => ['chart', await put('chart.csv', CHART), '--set', '920'], 'usage'],
   ['an empty file', async () => ['certificate', await put('empty.pdf', '')], 'empty'],
   [
     'a page of the web named .pdf',
     async () => ['certificate', await put('web.pdf', '<html><body>no</body></html>')],
     'not_what_its_name_says',
   ],
-  [
-    'an order that is no JSON',
-    async () => ['certificate', await put('c.txt', CERTIFICATE), '--order', await order('{')],
-    'input_not_valid',
-  ],
-  [
-    'an order without lines',
-    async () => [
-      'certificate',
-      await put('c.txt', CERTIFICATE),
-      '--order',
-      await order({ batch: 'B', po: '1' }),
-    ],
-    'input_not_valid',
-  ],
-])('%s ends with exit 2 and says why', async (_, call, code) => {
+])('%s: exit 2, and why', async (_, call, code) => {
   const [command, ...args] = await call();
   const { exit, printed } = await run(command, ...args);
   expect(exit).toBe(2);
   expect(printed).toEqual({ error: { code, message: expect.stringMatching(/\w{3}/) } });
+});
+
+test.each([
+  ['no file', []],
+  ['two files', ['a.pdf', 'b.pdf']],
+  ['an option that nobody knows', ['a.pdf', '--colour', 'red']],
+  ['an option without its value', ['a.pdf', '--order']],
+])('a call with %s is told how it is used', (_, args) => {
+  expect(() => callOf(args, ['order'], 'Usage: read FILE')).toThrow(/Usage: read FILE/);
+});
+
+test('options may stand before and behind the file', () => {
+  const call = { file: 'a.pdf', options: { order: 'o.json' } };
+  expect(callOf(['--order', 'o.json', 'a.pdf'], ['order', 'seen'], '')).toEqual(call);
+  expect(callOf(['a.pdf', '--order=o.json'], ['order', 'seen'], '')).toEqual(call);
+});
+
+test.each([
+  ['is no JSON', '{'],
+  ['lacks its lines', '{"batch": "B-1", "po": "1", "processor": {"name": "X"}, "process": "anodize"}'],
+  ['is a list', '[]'],
+])('an order that %s is refused with the place', async (_, content) => {
+  const file = await put('order.json', content);
+  await expect(jsonOf(file, Order)).rejects.toMatchObject({
+    code: 'input_not_valid',
+    message: expect.stringContaining(file),
+  });
+});
+
+test('a file that is not there is said so', async () => {
+  await expect(bytesOf(join(folder, 'none.pdf'))).rejects.toMatchObject({ code: 'file_not_found' });
+});
+
+test.each(['', ' ', 'abc', '1,5'])('"%s" is no number', (written) => {
+  expect(() => numberOf('set', written)).toThrow(/--set/);
 });

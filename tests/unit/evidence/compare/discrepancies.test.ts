@@ -46,6 +46,12 @@ const page = (hidden: Page['hidden'], origin: Page['origin'] = 'text_layer'): Pa
   marks: [],
   hidden,
 });
+const withWords = (...lines: string[]): Page => ({
+  ...page([]),
+  words: lines.flatMap((line) =>
+    line.split(' ').map((text) => ({ text, box: [0, 0, 1, 1] as const, confidence: 1 })),
+  ),
+});
 const HIDDEN = { text: 'Revision R', box: [0, 0, 1, 1] as const, why: 'colour' as const };
 
 type Case = [
@@ -81,6 +87,12 @@ const PLANTED: Record<string, Case[]> = {
   part_number_missing: [
     ['a line left out', HEAT, { lines: agreeing(HEAT).lines.slice(0, 1) }],
     ['no lines', HEAT, { lines: [] }],
+    [
+      'a line left out of the page',
+      HEAT,
+      { lines: agreeing(HEAT).lines.slice(0, 1) },
+      { file: { ...FILE, pages: [withWords('10-200 10-3115')] } },
+    ],
     ['a line without its number', HEAT, lines(HEAT, { part_number: null })],
   ],
   part_number_unknown: [
@@ -94,6 +106,12 @@ const PLANTED: Record<string, Case[]> = {
   ],
   part_number_transposed: [
     ['two digits', HEAT, lines(HEAT, { part_number: '10-020' })],
+    [
+      'on the page, its line not read',
+      HEAT,
+      { lines: agreeing(HEAT).lines.slice(0, 1) },
+      { file: { ...FILE, pages: [withWords('10-200 10-131,')] } },
+    ],
     ['over the dash', HEAT, lines(HEAT, { part_number: '12-000' })],
     ['in one that is not alone', HEAT, lines(HEAT, { part_number: '10-131' }, 1)],
   ],
@@ -351,6 +369,7 @@ const RIGHT: Case[] = [
   ],
   ['a number without its dash', HEAT, lines(HEAT, { part_number: '10200' })],
   ['letters for digits', HEAT, lines(HEAT, { part_number: '1O-2OO' })],
+  ['a revision recognised twice', HEAT, lines(HEAT, { rev: 'AA' }), { file: { ...FILE, recognised: true } }],
   ['a revision in words', HEAT, lines(HEAT, { rev: 'Rev. A' })],
   ['a revision that is not stated', HEAT, lines(HEAT, { rev: null })],
   ['honest rejects', HEAT, lines(HEAT, { qty_accepted: 10, qty_rejected: 2 })],
@@ -364,6 +383,26 @@ const RIGHT: Case[] = [
   ['a year in full', NDT, { specification: 'ASTM E1417/E1417M', specification_revision: '2021' }],
   ['a reapproved year', NDT, { specification: 'ASTM E1417-21(2025)', specification_revision: null }],
   ['no revision', HEAT, { specification_revision: null }],
+  [
+    'a part on the page whose line was not read',
+    HEAT,
+    { lines: agreeing(HEAT).lines.slice(0, 1) },
+    { file: { ...FILE, pages: [withWords('Lot L1 10-200 Clip', '10 - 311 Bracket')] } },
+  ],
+  [
+    'another number read for a part on the page',
+    HEAT,
+    lines(HEAT, { part_number: 'J54958', lot: null }),
+    { file: { ...FILE, pages: [withWords('10-200')] } },
+  ],
+  [
+    'parts on the page and no lines',
+    HEAT,
+    { lines: [] },
+    { file: { ...FILE, pages: [withWords('10-200 and 10-311')] } },
+  ],
+  ['minutes misread as hours', HEAT, cycles(HEAT, 'solution', { minutes: 38 * 60 })],
+  ['one time for start and end', HEAT, cycles(HEAT, 'solution', { soak_end: '2026-03-05T09:12' })],
   ['two specifications', HEAT, { specification: 'AMS2750, AMS2770R', specification_revision: null }],
   ['arabic types', PLATE, { class_type: 'Ty. 2 Cl. 2' }],
   ['a class in other words', PLATE, { class_type: 'golden chromate' }],
