@@ -85,7 +85,7 @@ const ANCHORS: Partial<Record<BatchFinding['waysOut'][number]['way'], string>> =
   set_days: '#terms',
   set_prices: '#lines',
   set_requirements: '#requirements',
-  set_loads: '#lines',
+  set_loads: '#load-plan',
   choose_processor: '#terms',
 };
 
