@@ -1,0 +1,21 @@
+import type { Order } from '../../order';
+import type { SeenCertificate, StatedCertificate } from '../certificate';
+import type { Outcome } from './outcome';
+import type { PairedLines } from './pair-lines';
+
+/** A certificate beside the order that it is compared with. */
+export interface Compared {
+  readonly stated: StatedCertificate;
+  readonly order: Order;
+  readonly orders: readonly Order[];
+  /** Other certificates for the same order: they may hold the rest of a line. */
+  readonly others: readonly StatedCertificate[];
+  readonly seen: readonly SeenCertificate[];
+  readonly isRecognised: boolean;
+  readonly pairs: PairedLines;
+  /** The order's number is another one, and no part number of this order stands on the certificate. */
+  readonly isOfOtherOrder: boolean;
+}
+
+/** One family of questions to a certificate beside its order. */
+export type Check = (compared: Compared) => readonly Outcome[];

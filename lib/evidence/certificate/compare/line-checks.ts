@@ -1,0 +1,197 @@
+import type { OrderLine } from '../../order';
+import type { CertificateLine } from '../certificate';
+import { likeness, lookalikeKey, plainKey } from '../match/alike';
+import { namesOrder } from '../match/same-order-number';
+import type { Check, Compared } from './compared';
+import { doubtful, meets, notStated, observed, wrong, type Outcome } from './outcome';
+import type { LinePair, StatedLine } from './pair-lines';
+
+/** Each ordered part is on the certificate under its number, and nothing else is. */
+export const showsEachPart: Check = (compared) => {
+  const { pairs, unknown } = compared.pairs;
+  if (compared.stated.lines.length === 0) return [noPartsListed(compared)];
+  return [
+    ...pairs.flatMap((pair) => partOutcome(pair, compared)),
+    ...unknown.map((line) => unknownPart(line, compared)),
+  ];
+};
+
+function noPartsListed({ order: { lines } }: Compared): Outcome {
+  const [only] = lines;
+  const numbers = lines.map(({ part_number }) => part_number).join(', ');
+  return wrong(
+    'part_number_missing',
+    {
+      requirement: `part number ${numbers}`,
+      line: lines.length === 1 ? (only?.line ?? null) : null,
+      ordered: numbers,
+    },
+    'The certificate lists no part numbers.',
+  );
+}
+
+function partOutcome({ ordered, stated }: LinePair, { others }: Compared): Outcome[] {
+  const asked = {
+    requirement: `part number ${ordered.part_number}`,
+    line: ordered.line,
+    ordered: ordered.part_number,
+  };
+  if (stated.length > 0) return stated.slice(0, 1).map((line) => namedPart(ordered, line));
+  const isElsewhere = others.some(({ lines }) => lines.some((line) => isSamePart(line, ordered)));
+  if (isElsewhere) return [meets(asked, 'It stands on another certificate of this order.')];
+  return [
+    wrong(
+      'part_number_missing',
+      asked,
+      `Line ${ordered.line}, ${ordered.part_number}, is not on the certificate.`,
+    ),
+  ];
+}
+
+const isSamePart = ({ part_number }: CertificateLine, ordered: OrderLine): boolean =>
+  part_number !== null && plainKey(part_number) === plainKey(ordered.part_number);
+
+function namedPart(ordered: OrderLine, { line, by }: StatedLine): Outcome {
+  const asked = {
+    requirement: `part number ${ordered.part_number}`,
+    line: ordered.line,
+    ordered: ordered.part_number,
+    stated: line.part_number,
+  };
+  switch (by) {
+    case 'same':
+      return meets(asked, 'It is the number ordered.');
+    case 'lookalike':
+      return meets(
+        asked,
+        `${line.part_number} differs from ${ordered.part_number} only in characters that look alike.`,
+      );
+    case 'transposed':
+      return wrong(
+        'part_number_transposed',
+        asked,
+        `The certificate says ${line.part_number}, the order ${ordered.part_number}: two characters changed places.`,
+      );
+    case 'near':
+    case 'only_one_left':
+      return wrong(
+        'part_number_unknown',
+        asked,
+        `The certificate says ${line.part_number} where the order has ${ordered.part_number}.`,
+      );
+    case 'no_number':
+      return doubtful(
+        'part_number_missing',
+        asked,
+        `The certificate states no part number for line ${ordered.line}, ${ordered.part_number}.`,
+      );
+  }
+}
+
+function unknownPart(line: CertificateLine, { order, orders, stated }: Compared): Outcome {
+  const number = line.part_number ?? 'without a number';
+  const other = orders.find(
+    (one) => one.batch !== order.batch && one.lines.some((ordered) => isSamePart(line, ordered)),
+  );
+  if (other && stated.purchase_order !== null && namesOrder(stated.purchase_order, other.po))
+    return observed(`The certificate also covers ${number} of batch ${other.batch}, order ${other.po}.`);
+  const whose = other ? ` It is on order ${other.po}, batch ${other.batch}.` : '';
+  return wrong(
+    'part_number_unknown',
+    { requirement: null, stated: line.part_number },
+    `Part ${number} on the certificate is not on the order.${whose}`,
+    'check',
+  );
+}
+
+/** The part's revision, the lot and the serial numbers are those that were sent. */
+export const hasRevisionLotAndSerials: Check = ({ pairs, isRecognised }) =>
+  pairs.pairs.flatMap(({ ordered, stated }) =>
+    stated.length === 0
+      ? []
+      : [
+          ...revisionOutcome(ordered, stated, isRecognised),
+          ...lotOutcome(ordered, stated, isRecognised),
+          ...serialOutcome(ordered, stated),
+        ],
+  );
+
+/** No revision, a dash and "N/C" say the same. */
+const revisionKey = (written: string): string => {
+  const key = written
+    .toUpperCase()
+    .replace(/\b(?:REVISION|REV|ISSUE)\b\.?/, '')
+    .replace(/[^A-Z0-9]/g, '');
+  return /^(?:NC|NONE|NA|ORIG|ORIGINAL|NEW)$/.test(key) ? '' : key;
+};
+
+/** What recognition may have misread is not held against the certificate. */
+const isSameKey = (one: string, other: string, isRecognised: boolean): boolean =>
+  one === other || (isRecognised && lookalikeKey(one) === lookalikeKey(other));
+
+function revisionOutcome(ordered: OrderLine, stated: readonly StatedLine[], isRecognised: boolean) {
+  if (!ordered.rev) return [];
+  const asked = { requirement: `revision ${ordered.rev}`, line: ordered.line, ordered: ordered.rev };
+  const written = stated.flatMap(({ line }) => line.rev ?? []);
+  const [first] = written;
+  if (first === undefined) return [notStated(asked)];
+  const key = revisionKey(ordered.rev);
+  const other = written.find((rev) => !isSameKey(revisionKey(rev), key, isRecognised));
+  if (other === undefined) return [meets({ ...asked, stated: first }, 'It is the revision ordered.')];
+  return [
+    wrong(
+      'revision_mismatch',
+      { ...asked, stated: other },
+      `${ordered.part_number} was ordered at revision ${ordered.rev}, the certificate says ${other}.`,
+    ),
+  ];
+}
+
+const lotKeys = (written: string): string[] =>
+  written
+    .split(/[,;&/+\s]+/)
+    .concat(written)
+    .map((one) => plainKey(one.replace(/^[\s#]*(?:lot|heat)?\s*(?:no\.?|number)?[\s:#.]*/i, '')))
+    .filter((key) => key !== '');
+
+function lotOutcome(ordered: OrderLine, stated: readonly StatedLine[], isRecognised: boolean) {
+  if (!ordered.lot) return [];
+  const asked = { requirement: `lot ${ordered.lot}`, line: ordered.line, ordered: ordered.lot };
+  const written = stated.flatMap(({ line }) => line.lot ?? []);
+  const [first] = written;
+  if (first === undefined) return [notStated(asked)];
+  const own = lotKeys(ordered.lot);
+  const isOwn = (lot: string) =>
+    lotKeys(lot).some((key) => own.some((one) => isSameKey(one, key, isRecognised)));
+  const other = written.find((lot) => !isOwn(lot));
+  if (other === undefined) return [meets({ ...asked, stated: first }, 'It is the lot that was sent.')];
+  return [
+    wrong(
+      'lot_mismatch',
+      { ...asked, stated: other },
+      `Lot ${ordered.lot} of ${ordered.part_number} was sent, the certificate says ${other}.`,
+    ),
+  ];
+}
+
+function serialOutcome(ordered: OrderLine, stated: readonly StatedLine[]): Outcome[] {
+  const sent = ordered.serials ?? [];
+  if (sent.length === 0) return [];
+  const asked = {
+    requirement: `serial numbers ${sent.join(', ')}`,
+    line: ordered.line,
+    ordered: sent.join(', '),
+  };
+  const written = stated.flatMap(({ line }) => line.serials ?? []);
+  if (written.length === 0) return [notStated(asked)];
+  const strange = written.filter((serial) => !sent.some((one) => likeness(one, serial) === 'same'));
+  if (strange.length === 0)
+    return [meets({ ...asked, stated: written.join(', ') }, 'All of them were sent.')];
+  return [
+    wrong(
+      'serial_mismatch',
+      { ...asked, stated: written.join(', ') },
+      `Serial number ${strange.join(', ')} of ${ordered.part_number} was not sent.`,
+    ),
+  ];
+}
