@@ -12,6 +12,7 @@ import { getBatch, getBatchLines, listBatches } from '@/lib/batches/contract';
 import { getLoadPlan } from '@/lib/batches/load-contract';
 import { getTraveller, listBatchDocuments } from '@/lib/batches/paper-contract';
 import { listWaitingLots, listWaitingSteps } from '@/lib/batches/waiting-contract';
+import { proposeForBatch } from '@/lib/requirements/contract';
 import { getGate } from '@/lib/stock/contract';
 
 const SHOWN = [
@@ -25,6 +26,7 @@ const SHOWN = [
   listWaitingLots,
   listWaitingSteps,
   listAudit,
+  proposeForBatch,
   getGate,
 ];
 

@@ -17,6 +17,7 @@ import * as portal from '@/lib/portal/endpoints';
 import * as batchLinks from '@/lib/portal/link-endpoints';
 import * as processors from '@/lib/processors/endpoints';
 import * as receipts from '@/lib/receipts/endpoints';
+import * as requirements from '@/lib/requirements/endpoints';
 import * as search from '@/lib/search/endpoints';
 import * as session from '@/lib/session/endpoints';
 import * as stock from '@/lib/stock/endpoints';
@@ -45,6 +46,7 @@ export const ALL_ENDPOINTS: readonly Endpoint[] = [
   portal,
   processors,
   receipts,
+  requirements,
   search,
   session,
   stock,

@@ -1,6 +1,7 @@
 import type { CalendarDay, Clock } from '@/lib/day-words';
 import type { PartSizes } from '@/lib/parts/computed-mass';
 import type { TypedMaterial } from '@/lib/parts/material-of';
+import type { OrderingAnswers } from '@/lib/parts/ordering-answers';
 import type { BatchTables } from '@/lib/reference/batch-tables';
 import type { Process } from '@/lib/trade/process';
 
@@ -32,6 +33,8 @@ export interface CheckedStep extends StepAsked {
   id: string;
   conditionBefore: string | null;
   targetCondition: string | null;
+  /** What the order states for it beside these. */
+  ordering: OrderingAnswers;
 }
 
 /** What the rules of the trade ask of a part; measures in mm and g, null where the part does not say. */

@@ -10,6 +10,7 @@ export const STEP: CheckedStep = {
   classType: 'type II class 1',
   conditionBefore: null,
   targetCondition: null,
+  ordering: {},
 };
 
 const PART: CheckedPart = {
@@ -86,7 +87,13 @@ export const factsOf = (
   lines: readonly CheckedLine[] = [LINE],
   given: { batch?: Partial<CheckFacts['batch']>; processor?: Partial<CheckFacts['processor']> } = {},
 ): CheckFacts => {
-  const { id: _, conditionBefore: __, targetCondition: ___, ...asked } = lines[0]?.step ?? STEP;
+  const {
+    id: _,
+    conditionBefore: __,
+    targetCondition: ___,
+    ordering: ____,
+    ...asked
+  } = lines[0]?.step ?? STEP;
   return {
     zone: 'UTC',
     now: new Date('2026-06-17T12:00:00Z'),
