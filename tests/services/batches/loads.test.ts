@@ -6,6 +6,8 @@ import { batchLines } from '@/db/schema/batches';
 import { parts } from '@/db/schema/parts';
 import { getBatchLines } from '@/lib/batches/get-batch-lines';
 import { getLoadPlan } from '@/lib/batches/get-load-plan';
+import { getTraveller } from '@/lib/batches/queries';
+import { reissueBatch } from '@/lib/batches/reissue-batch';
 import { setLoads } from '@/lib/batches/set-loads';
 import { newId } from '@/lib/ids';
 
@@ -101,5 +103,30 @@ test('a line says what can be computed of a part that was not weighed', async ()
     const sized = await read();
     expect(sized?.massG).toBeNull();
     expect(sized?.computed?.areaMm2).toBeCloseTo(2 * (1000 * 500 + 1500 * 1.016), 3);
+  });
+});
+
+test('what a traveller said of the loads stays when it is stated again, though a part was changed', async () => {
+  const here = await world();
+  await here.as(['lead'], async (ctx) => {
+    const batch = await makeDispatchedBatch(ctx, here.processorId);
+    const read = async () => (await getTraveller(ctx, { batchId: batch.id })).furnaceLoads;
+    const stated = await read();
+    expect(stated?.loads[0]?.rows).toContainEqual(
+      expect.objectContaining({ name: 'Governs', says: '0.040 in' }),
+    );
+    const { lines } = await getBatchLines(ctx, { batchId: batch.id });
+    await ctx.tx
+      .update(parts)
+      .set({ clad: false, thicknessMm: 25.4, thicknessEntered: '1 in' })
+      .where(eq(parts.id, lines[0]?.partId ?? ''));
+    await reissueBatch(ctx, {
+      batchId: batch.id,
+      version: batch.version,
+      note: 'ring first',
+      prices: [],
+      requirements: [],
+    });
+    expect(await read()).toEqual(stated);
   });
 });
