@@ -10,7 +10,14 @@ export const STEP: CheckedStep = {
   classType: 'type II class 1',
   conditionBefore: null,
   targetCondition: null,
-  ordering: {},
+  ordering: {
+    areas: 'all over',
+    sampling_plan: 'by the specification',
+    coating_thickness: 'by the class',
+    abrasion_test: 'none',
+    build_up: 'before coating',
+    contact_marks: 'in holes',
+  },
 };
 
 const PART: CheckedPart = {
