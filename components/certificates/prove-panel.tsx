@@ -9,6 +9,7 @@ import { CertificateHead } from './certificate-head';
 import { CertificateWarnings } from './certificate-warnings';
 import { LineRows } from './line-row';
 import { ProveFoot } from './prove-foot';
+import { ReadingSummary } from './reading-summary';
 import { RequirementRows } from './requirement-row';
 import { SignStep } from './sign-step';
 import { Signatures } from './signatures';
@@ -19,6 +20,7 @@ const COLUMNS = [
   { says: 'Must be proved', className: 'w-[25%]' },
   { says: 'Ordered', className: 'w-[23%]' },
   { says: 'As stated', className: 'w-[17%]' },
+  { says: 'How well', className: 'w-14 max-md:hidden' },
   { says: 'Verdict' },
   { says: 'You', right: true },
 ];
@@ -40,6 +42,7 @@ export function ProvePanel({ proving }: { proving: Proving }) {
           </span>
         </div>
         <CertificateWarnings proving={proving} />
+        <ReadingSummary proving={proving} />
         <CertificateHead proving={proving} />
         <Table label="What must be proved" columns={COLUMNS} dense>
           <Rows proving={proving} />

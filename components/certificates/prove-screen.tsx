@@ -8,7 +8,9 @@ import { useClock } from '@/components/session/use-me';
 import { certificateName, shortHash } from './certificate-words';
 import { PageViewer } from './page-viewer';
 import { ProvePanel } from './prove-panel';
+import { Thread } from './thread';
 import { useProving, type Proving } from './use-proving';
+import { spotsOf } from './use-reading';
 
 /** The page left, what it must prove right. */
 export function ProveScreen({ certificateId }: { certificateId: string }) {
@@ -19,11 +21,13 @@ export function ProveScreen({ certificateId }: { certificateId: string }) {
         <Viewed proving={proving} />
       </div>
       <ProvePanel proving={proving} />
+      <Thread row={proving.selected} />
     </div>
   );
 }
 
-function Viewed({ proving: { data } }: { proving: Proving }) {
+function Viewed({ proving }: { proving: Proving }) {
+  const { data, reading, selected } = proving;
   const clock = useClock();
   const [chartId, setChartId] = useState<string | null>(null);
   const chart = data.charts.find((one) => one.id === chartId);
@@ -60,5 +64,22 @@ function Viewed({ proving: { data } }: { proving: Proving }) {
         ))}
     </span>
   );
-  return <PageViewer key={shown.id} file={shown} title={title} facts={facts} choice={choice} />;
+  const read = {
+    pages: reading.data?.pages ?? [],
+    spots: spotsOf(reading.data, { ...data, selected }),
+    selected,
+    numberOf: (row: string) => proving.rows.indexOf(row) + 1,
+    onRow: proving.toRow,
+    onWords: proving.canEdit && selected !== null ? reading.choose : null,
+  };
+  return (
+    <PageViewer
+      key={shown.id}
+      file={shown}
+      title={title}
+      facts={facts}
+      choice={choice}
+      {...(!chart && { read })}
+    />
+  );
 }

@@ -10,6 +10,7 @@ import { PROCESS_WORDS } from '@/lib/trade/process';
 import { keepFile } from './keep-file';
 import { dayOf, type DemoProcessor } from './organisations';
 import { makeForm } from './papers';
+import { statedOn } from './stated-on';
 
 interface Paper {
   name: string;
@@ -56,7 +57,13 @@ async function readOrder(ctx: Ctx, batchId: string) {
 export async function certificateOf(
   ctx: Ctx,
   batchId: string,
-  given: { processor: DemoProcessor; uncovered: number; missing: number },
+  given: {
+    processor: DemoProcessor;
+    uncovered: number;
+    missing: number;
+    /** What it states otherwise than a good paper would, by characteristic. */
+    stated: Readonly<Record<string, string>>;
+  },
 ): Promise<Paper> {
   const batch = await readOrder(ctx, batchId);
   const number = certificateNumber(batch.number, ctx.now);
@@ -85,11 +92,7 @@ export async function certificateOf(
       ],
     })),
     statements: [
-      ...new Set(
-        batch.requirements.map(
-          (one) => `${one.characteristic}: as ordered (${[one.limit, one.unit].filter(Boolean).join(' ')})`,
-        ),
-      ),
+      ...new Set(batch.requirements.flatMap((one) => statedOn(one, given.stated) ?? [])),
       'We certify that the parts listed above were processed and inspected to the order and the specification named, and that the results are on file.',
     ],
     signed: { name: given.processor.contact, role: 'Quality', day: dayOf(ctx.now) },

@@ -55,6 +55,8 @@ export interface BatchPlot {
   papersAfter?: number;
   /** Pieces of the last line that the certificate does not cover. */
   uncovered?: number;
+  /** What the certificate states otherwise than it ought to, by characteristic. */
+  states?: Readonly<Record<string, string>>;
   provedAfter?: number;
   held?: { after: number; pieces: number; what: string };
   invoicedAfter?: number;
@@ -131,6 +133,7 @@ export async function* batchThread(
       processor: plot.processor,
       uncovered: plot.uncovered ?? 0,
       missing: plot.missing ?? 0,
+      stated: plot.states ?? {},
     });
     const fileId = await keepPaper(ctx, batchId, { ...paper, purpose: 'certificate' });
     return (await sendPaper(ctx, { batchId, kind: 'certificate', fileId })).id;

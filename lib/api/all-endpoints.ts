@@ -2,6 +2,7 @@ import * as assemblies from '@/lib/assemblies/endpoints';
 import * as audit from '@/lib/audit/endpoints';
 import * as batches from '@/lib/batches/endpoints';
 import * as certificates from '@/lib/certificates/endpoints';
+import * as charts from '@/lib/charts/endpoints';
 import * as dossiers from '@/lib/dossiers/endpoints';
 import * as files from '@/lib/files/endpoints';
 import * as invoices from '@/lib/invoices/endpoints';
@@ -16,6 +17,7 @@ import * as people from '@/lib/people/endpoints';
 import * as portal from '@/lib/portal/endpoints';
 import * as batchLinks from '@/lib/portal/link-endpoints';
 import * as processors from '@/lib/processors/endpoints';
+import * as readings from '@/lib/readings/endpoints';
 import * as receipts from '@/lib/receipts/endpoints';
 import * as requirements from '@/lib/requirements/endpoints';
 import * as search from '@/lib/search/endpoints';
@@ -32,6 +34,7 @@ export const ALL_ENDPOINTS: readonly Endpoint[] = [
   batchLinks,
   batches,
   certificates,
+  charts,
   dossiers,
   files,
   invoices,
@@ -45,6 +48,7 @@ export const ALL_ENDPOINTS: readonly Endpoint[] = [
   people,
   portal,
   processors,
+  readings,
   receipts,
   requirements,
   search,

@@ -22,14 +22,26 @@ export interface HiddenText {
   readonly why: 'colour' | 'size' | 'covered' | 'outside' | 'invisible';
 }
 
+/**
+ * Where a page was straightened before it was read: carries a point of the straightened page to the page as a viewer
+ * shows it, `turned` and `width` × `height` points large. Nine numbers row by row: (x', y') / w'.
+ */
+export interface AsFiled {
+  readonly width: number;
+  readonly height: number;
+  readonly projection: readonly [number, number, number, number, number, number, number, number, number];
+}
+
 export interface Page {
   /** From 1. */
   readonly number: number;
   /** Points, turned upright. */
   readonly width: number;
   readonly height: number;
-  /** Degrees the page was turned clockwise to stand upright. */
+  /** Degrees the page was turned clockwise to stand upright; of a PDF in place of the turn its file asks for. */
   readonly turned: 0 | 90 | 180 | 270;
+  /** Only where a scan lay askew or a photograph was taken at a slant. */
+  readonly asFiled?: AsFiled;
   readonly origin: 'text_layer' | 'recognised' | 'plain_text';
   /** Only what a person can see, in no promised order. */
   readonly words: readonly Word[];

@@ -12,7 +12,7 @@ import { amountText } from '@/lib/money';
 import type * as contract from './contract';
 import { lastPaymentOf } from './last-payment';
 import { balanceOf, enterMoney } from './money-ledger';
-import { numberKey } from './number-key';
+import { numberKey } from '@/lib/evidence/invoice/number-key';
 import { lockInvoice } from './read-invoice';
 
 /** A credit of the processor: lowers what is still to be paid of an approved invoice, each credit once. */

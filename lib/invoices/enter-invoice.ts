@@ -12,7 +12,7 @@ import { newId } from '@/lib/ids';
 import { lockSentBatch } from '@/lib/receipts/lock-batch';
 
 import type * as contract from './contract';
-import { numberKey } from './number-key';
+import { numberKey } from '@/lib/evidence/invoice/number-key';
 import { lockInvoice } from './read-invoice';
 
 /** Takes up an invoice that did not come through the processor's page. */

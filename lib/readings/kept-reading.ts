@@ -1,6 +1,7 @@
 import { z } from 'zod';
 
 import { StatedCertificate } from '@/lib/evidence/certificate/certificate';
+import { StatedInvoice } from '@/lib/evidence/invoice/invoice';
 
 /** Bumped when the reader learns something, so that it can be told what an older edition read. */
 export const READER_EDITION = 1;
@@ -28,3 +29,6 @@ export type ReadFile = z.output<typeof ReadFile>;
 /** What was read in a certificate's file: all certificates that it holds, before anything is compared. */
 export const KeptCertificates = z.object({ file: ReadFile, certificates: z.array(StatedCertificate) });
 export type KeptCertificates = z.output<typeof KeptCertificates>;
+
+export const KeptInvoice = z.object({ file: ReadFile, invoice: StatedInvoice });
+export type KeptInvoice = z.output<typeof KeptInvoice>;

@@ -16,17 +16,18 @@ const FORMS: readonly [RegExp, (found: readonly number[]) => Pick<Limit, 'min' |
     ([min, max]) => ({ min: min ?? null, max: max ?? null }),
   ],
   [
+    new RegExp(`^${SCALE}${NUMBER}${UNIT}\\s*±\\s*${NUMBER}${UNIT}$`, 'i'),
+    ([middle = 0, half = 0]) => ({ min: middle - half, max: middle + half }),
+  ],
+  [
     new RegExp(`^${SCALE}${NUMBER}${UNIT}\\s*or (?:more|over)()()$`, 'i'),
     ([min]) => ({ min: min ?? null, max: null }),
   ],
   [
-    new RegExp(`^${SCALE}${NUMBER}${UNIT}\\s*or (?:less|under)()()$`, 'i'),
+    new RegExp(`^${SCALE}${NUMBER}${UNIT}\\s*or (?:less|under)(?: after \\w+)?()()$`, 'i'),
     ([max]) => ({ min: null, max: max ?? null }),
   ],
-  [
-    new RegExp(`^${SCALE}${NUMBER}()${UNIT}()$`, 'i'),
-    ([both]) => ({ min: both ?? null, max: both ?? null }),
-  ],
+  [new RegExp(`^${SCALE}${NUMBER}${UNIT}()()$`, 'i'), ([both]) => ({ min: both ?? null, max: both ?? null })],
 ];
 
 /**

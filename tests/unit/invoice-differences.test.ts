@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { expect, test } from 'vitest';
 
 import { differencesOf, toPayMinor, type InvoiceLine, type OrderSide } from '@/lib/invoices/differences';
-import { numberKey } from '@/lib/invoices/number-key';
+import { numberKey } from '@/lib/evidence/invoice/number-key';
 
 const order: OrderSide = {
   currency: 'USD',

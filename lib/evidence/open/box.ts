@@ -1,5 +1,6 @@
 import type { Box } from '../page';
 import { xOf, yOf, type Matrix } from './pdf/matrix';
+import { project, type Projection } from './picture/projection';
 
 export const areaOf = (box: Box) => Math.max(0, box[2] - box[0]) * Math.max(0, box[3] - box[1]);
 
@@ -43,4 +44,40 @@ export function boxThrough(matrix: Matrix, [left, top, right, bottom]: Box): Box
     yOf(matrix, right, bottom),
   ];
   return [Math.min(...xs), Math.min(...ys), Math.max(...xs), Math.max(...ys)];
+}
+
+/** The upright box around a box that was carried by a projection. */
+export function boxThroughProjection(projection: Projection, [left, top, right, bottom]: Box): Box {
+  const corners = [
+    project(projection, left, top),
+    project(projection, right, top),
+    project(projection, right, bottom),
+    project(projection, left, bottom),
+  ];
+  const xs = corners.map(([x]) => x);
+  const ys = corners.map(([, y]) => y);
+  return [Math.min(...xs), Math.min(...ys), Math.max(...xs), Math.max(...ys)];
+}
+
+/** Boxes that come as near as `reach` to each other become one. */
+export function joinNear(boxes: readonly Box[], reach: number): Box[] {
+  const near = (a: Box, b: Box) =>
+    a[0] - reach < b[2] && b[0] - reach < a[2] && a[1] - reach < b[3] && b[1] - reach < a[3];
+  let joined = [...boxes];
+  for (let changed = true; changed;) {
+    changed = false;
+    const next: Box[] = [];
+    for (const box of joined) {
+      const at = next.findIndex((other) => near(box, other));
+      const other = next[at];
+      if (other) {
+        next[at] = union(other, box);
+        changed = true;
+      } else {
+        next.push(box);
+      }
+    }
+    joined = next;
+  }
+  return joined;
 }

@@ -11,6 +11,8 @@ test.each([
   ['HR15N 78 or more', '', { scale: 'HR15N', min: 78, max: null, unit: '' }],
   ['28.5 to 32.5', '% IACS', { scale: null, min: 28.5, max: 32.5, unit: '% IACS' }],
   ['0.3 mil or more', '', { scale: null, min: 0.3, max: null, unit: 'mil' }],
+  ['375 ± 25 °F', '', { scale: null, min: 350, max: 400, unit: '°F' }],
+  ['4 or less after plating', 'h', { scale: null, min: null, max: 4, unit: 'h' }],
   ['4', 'h', { scale: null, min: 4, max: 4, unit: 'h' }],
 ])('the limit %s in %s', (words, unit, limit) => {
   expect(readLimit(words, unit)).toEqual(limit);

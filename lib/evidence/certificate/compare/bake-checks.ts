@@ -24,7 +24,9 @@ export const isBaked: Check = ({ stated, order }) => {
       ),
     ];
   return [
-    ...temperatureOutcomes('bake', bake, cycles),
+    ...(bake.set_f === undefined
+      ? []
+      : temperatureOutcomes('bake', { set_f: bake.set_f, tolerance_f: bake.tolerance_f ?? 0 }, cycles)),
     ...(bake.min_hours === undefined
       ? []
       : soakOutcomes('bake', { min: bake.min_hours * 60 }, cycles, {

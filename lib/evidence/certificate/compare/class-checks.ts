@@ -35,14 +35,24 @@ export const isOrderedClass: Check = ({ stated, order }) => {
   return isInspection ? [] : [freeWords(asked, words, says)];
 };
 
-type Named = Readonly<Partial<Record<keyof Designation | 'bath', string>>>;
+type Named = Readonly<Partial<Record<keyof Designation | 'bath' | 'medium' | 'carrier', string>>>;
+
+/** Words that choose something and have no name of their own before them. */
+const CHOICES: readonly (readonly ['bath' | 'medium' | 'carrier', RegExp])[] = [
+  ['bath', /\b((?:NITRIC|CITRIC)\s*\d)\b/],
+  ['medium', /\b(?<!NON-?\s?)(FLUORESCENT|VISIBLE)\b/],
+  ['carrier', /\b(WET|DRY)\b/],
+];
 
 function designationOf(written: string): Named {
-  const bath = /\b(NITRIC|CITRIC)\s*(\d)\b/.exec(written.toUpperCase());
+  const chosen = CHOICES.flatMap(([key, pattern]) => {
+    const value = pattern.exec(written.toUpperCase())?.[1];
+    return value === undefined ? [] : [[key, value.replace(/\s+/g, ' ')] as const];
+  });
   const read = Object.entries(readDesignation(written)).map(
     ([key, value]) => [key, sameValue(value)] as const,
   );
-  return { ...Object.fromEntries(read), ...(bath && { bath: `${bath[1] ?? ''} ${bath[2] ?? ''}` }) };
+  return { ...Object.fromEntries(read), ...Object.fromEntries(chosen) };
 }
 
 function designationOutcome(
@@ -130,7 +140,9 @@ function inspectionWords(order: Order): string {
 function inspectionSaid({ ndt, class_type }: StatedCertificate): string {
   const read = [
     ...word('Type', ndt?.type),
-    ...(ndt?.method && /^(?:method\s*)?[A-D]$/i.test(ndt.method) ? word('Method', ndt.method) : []),
+    ...(ndt?.method && /^(?:method\s*)?[A-D]$/i.test(ndt.method)
+      ? word('Method', ndt.method)
+      : [ndt?.method ?? '']),
     ...word('Level', ndt?.sensitivity),
   ];
   return [...read, class_type ?? ''].filter((part) => part !== '').join(', ');

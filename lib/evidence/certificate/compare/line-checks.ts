@@ -30,13 +30,13 @@ function noPartsListed({ order: { lines } }: Compared): Outcome {
   );
 }
 
-function partOutcome({ ordered, stated }: LinePair, { others }: Compared): Outcome[] {
+function partOutcome({ ordered, stated }: LinePair, { others, isRecognised }: Compared): Outcome[] {
   const asked = {
     requirement: `part number ${ordered.part_number}`,
     line: ordered.line,
     ordered: ordered.part_number,
   };
-  if (stated.length > 0) return stated.slice(0, 1).map((line) => namedPart(ordered, line));
+  if (stated.length > 0) return stated.slice(0, 1).map((line) => namedPart(ordered, line, isRecognised));
   const isElsewhere = others.some(({ lines }) => lines.some((line) => isSamePart(line, ordered)));
   if (isElsewhere) return [meets(asked, 'It stands on another certificate of this order.')];
   return [
@@ -51,7 +51,7 @@ function partOutcome({ ordered, stated }: LinePair, { others }: Compared): Outco
 const isSamePart = ({ part_number }: CertificateLine, ordered: OrderLine): boolean =>
   part_number !== null && plainKey(part_number) === plainKey(ordered.part_number);
 
-function namedPart(ordered: OrderLine, { line, by }: StatedLine): Outcome {
+function namedPart(ordered: OrderLine, { line, by }: StatedLine, isRecognised: boolean): Outcome {
   const asked = {
     requirement: `part number ${ordered.part_number}`,
     line: ordered.line,
@@ -77,7 +77,8 @@ function namedPart(ordered: OrderLine, { line, by }: StatedLine): Outcome {
       return wrong(
         'part_number_unknown',
         asked,
-        `The certificate says ${line.part_number} where the order has ${ordered.part_number}.`,
+        `The certificate says ${line.part_number} where the order has ${ordered.part_number}.${isRecognised ? ' It may be misread: look at the page.' : ''}`,
+        isRecognised ? 'check' : 'blocks',
       );
     case 'no_number':
       return doubtful(

@@ -36,7 +36,8 @@ export function pairLines(order: Order, stated: readonly CertificateLine[]): Pai
   for (const by of ['same', 'lookalike'] as const)
     for (const line of [...left]) {
       const alike = order.lines.filter((ordered) => isAlike(line, ordered, by));
-      const ordered = nearestOf(line, alike, taken);
+      const exact = alike.filter(({ part_number }) => isNumber(line, part_number));
+      const ordered = nearestOf(line, exact.length > 0 ? exact : alike, taken);
       if (ordered) take(line, ordered, by);
     }
   const free = () => order.lines.filter((ordered) => !taken.has(ordered));
@@ -59,8 +60,14 @@ export function pairLines(order: Order, stated: readonly CertificateLine[]): Pai
   };
 }
 
-const isAlike = (line: CertificateLine, ordered: OrderLine, by: Likeness): boolean =>
-  line.part_number !== null && likeness(line.part_number, ordered.part_number) === by;
+/** Some print a part number with its revision behind it. */
+const isAlike = ({ part_number }: CertificateLine, ordered: OrderLine, by: Likeness): boolean =>
+  part_number !== null &&
+  (likeness(part_number, ordered.part_number) === by ||
+    (by === 'same' && !!ordered.rev && likeness(part_number, ordered.part_number + ordered.rev) === by));
+
+const isNumber = ({ part_number }: CertificateLine, number: string): boolean =>
+  part_number !== null && plainKey(part_number) === plainKey(number);
 
 const isSameLot = (line: CertificateLine, ordered: OrderLine): boolean =>
   line.lot !== null && !!ordered.lot && plainKey(line.lot) === plainKey(ordered.lot);

@@ -130,7 +130,9 @@ function contradictedLines({ lines, facts }: StatedCertificate): Map<Certificate
   for (const { field, value } of facts) {
     const line = lines[Number(LINE_TOTAL.exec(field)?.[1] ?? -1)];
     const pieces = line ? piecesOf(line) : null;
-    if (line && pieces !== null && typeof value === 'number' && value !== pieces) found.set(line, value);
+    if (!line || pieces === null || typeof value !== 'number' || value === pieces) continue;
+    // Fewer without rejects is a part of what was ordered, and the balance is open.
+    if (pieces > value || (line.qty_rejected ?? 0) > 0) found.set(line, value);
   }
   return found;
 }

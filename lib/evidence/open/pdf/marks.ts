@@ -1,5 +1,5 @@
 import type { Box, Mark } from '../../page';
-import { areaOf, union } from '../box';
+import { areaOf, joinNear } from '../box';
 import { areaEnclosed } from './draw-path';
 import type { Drawn, DrawnPath } from './drawn';
 
@@ -34,30 +34,12 @@ export function findMarks(drawn: Drawn, page: Box): Mark[] {
     )
     .filter(({ box }) => areaOf(box) < 0.8 * areaOf(page))
     .map(({ box }): Mark => ({ kind: 'picture', box }));
-  return [...rules, ...pictures, ...joinNear(strokes).map((box): Mark => ({ kind: 'stroke', box }))];
+  return [
+    ...rules,
+    ...pictures,
+    ...joinNear(strokes, SAME_HAND).map((box): Mark => ({ kind: 'stroke', box })),
+  ];
 }
-
-/** Boxes that nearly touch become one. */
-function joinNear(boxes: readonly Box[]): Box[] {
-  let joined = [...boxes];
-  for (let changed = true; changed;) {
-    changed = false;
-    const next: Box[] = [];
-    for (const box of joined) {
-      const at = next.findIndex((other) => near(box, other));
-      if (at < 0) next.push(box);
-      else {
-        next[at] = union(next[at] as Box, box);
-        changed = true;
-      }
-    }
-    joined = next;
-  }
-  return joined;
-}
-
-const near = (a: Box, b: Box) =>
-  a[0] - SAME_HAND < b[2] && b[0] - SAME_HAND < a[2] && a[1] - SAME_HAND < b[3] && b[1] - SAME_HAND < a[3];
 
 /**
  * Whether a path looks drawn by hand: within the size of a signature, longer than its box is wide, bending often,

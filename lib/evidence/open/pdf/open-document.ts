@@ -11,17 +11,15 @@ const folder = (name: string) => `${join(home, name)}/`;
 /**
  * Opens a PDF without running anything in it.
  *
- * `paints` asks for the letters' outlines too, which only painting needs.
- *
  * @throws UnreadableFile `damaged`, `password_needed`, `wrong_password`, `too_many_pages`
  */
 export async function openDocument(
   bytes: Uint8Array,
-  { password, limits, paints = false }: { password?: string | undefined; limits: Limits; paints?: boolean },
+  { password, limits }: { password?: string | undefined; limits: Limits },
 ): Promise<PDFDocumentProxy> {
   const task = getDocument({
-    // pdf.js takes the bytes over, so it is given its own.
-    data: bytes.slice(),
+    // pdf.js takes the bytes over, so it is given its own; of a Buffer it will not have them.
+    data: new Uint8Array(bytes),
     ...(password === undefined ? {} : { password }),
     verbosity: VerbosityLevel.ERRORS,
     isEvalSupported: false,
@@ -33,7 +31,6 @@ export async function openDocument(
     standardFontDataUrl: folder('standard_fonts'),
     wasmUrl: folder('wasm'),
     iccUrl: folder('iccs'),
-    fontExtraProperties: paints,
   });
   try {
     const document = await task.promise;

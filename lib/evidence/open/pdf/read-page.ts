@@ -18,7 +18,10 @@ export interface Layers {
 /** A page as its file describes it, before anyone has looked at its picture. */
 export interface DescribedPage {
   readonly page: Page;
+  /** What is drawn on the upright page. */
   readonly drawn: Drawn;
+  /** The same on the page as it lies in the file, turned by nothing. */
+  describeUnturned(): { readonly drawn: Drawn; readonly box: Box };
   /** 0 to 1: the share of characters whose font says which letter they are. */
   readonly readable: number;
 }
@@ -45,6 +48,10 @@ export async function readPage(proxy: PDFPageProxy, layers: Layers): Promise<Des
   const { words, rules } = wordsOf(seen);
   return {
     drawn: upright.drawn,
+    describeUnturned: () => {
+      const { drawn, page: box } = upright.rotation === 0 ? upright : play(0);
+      return { drawn, box };
+    },
     readable: shareReadable(upright.drawn.runs),
     page: {
       number: proxy.pageNumber,

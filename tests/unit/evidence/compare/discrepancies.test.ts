@@ -104,6 +104,11 @@ const PLANTED: Record<string, Case[]> = {
   quantity_mismatch: [
     ['too few', HEAT, lines(HEAT, { qty_accepted: 11 })],
     ['too many', HEAT, lines(HEAT, { qty_accepted: 13 })],
+    [
+      'a part of what was ordered',
+      HEAT,
+      { ...lines(HEAT, { qty_accepted: 7 }), facts: [fact('lines[0].qty_received', 12)] },
+    ],
     ['too few with rejects', HEAT, lines(HEAT, { qty_accepted: 9, qty_rejected: 2 })],
   ],
   quantity_arithmetic: [
@@ -266,6 +271,11 @@ const PLANTED: Record<string, Case[]> = {
   ndt_type_mismatch: [
     ['type', NDT, ndt({ type: 'Type II' })],
     ['level', NDT, ndt({ type: 'I', method: 'A', sensitivity: 'Level 3' })],
+    [
+      'visible for fluorescent particles',
+      penetrant({ process: 'magnetic_particle', spec: 'ASTM E1444', class_type: 'wet fluorescent' }),
+      { ...ndt({ method: 'Wet visible' }) },
+    ],
     ['in its words', NDT, { class_type: 'Type 1 Method C, Sensitivity Level 2' }],
   ],
   personnel_level_too_low: [
@@ -333,6 +343,12 @@ const RIGHT: Case[] = [
   ['an order number in words', HEAT, { purchase_order: 'P.O. No: 5001 Rev 2' }],
   ['two order numbers', HEAT, { purchase_order: 'PO-5001 and PO-5002' }],
   ['an order number misread', HEAT, { purchase_order: 'PO-S0O1' }, { file: { ...FILE, recognised: true } }],
+  ['a number with its revision behind', HEAT, lines(HEAT, { part_number: '10-200-A', rev: null })],
+  [
+    'wet fluorescent particles',
+    penetrant({ process: 'magnetic_particle', spec: 'ASTM E1444', class_type: 'wet fluorescent' }),
+    ndt({ method: 'Magnetic particle, fluorescent, wet' }),
+  ],
   ['a number without its dash', HEAT, lines(HEAT, { part_number: '10200' })],
   ['letters for digits', HEAT, lines(HEAT, { part_number: '1O-2OO' })],
   ['a revision in words', HEAT, lines(HEAT, { rev: 'Rev. A' })],

@@ -99,6 +99,7 @@ test.each<[string, Partial<StatedCertificate>]>([
     { ...nothing, lines: lines('10-020', '10-131'), processor: 'Example Thermal' },
   ],
   ['its order mistyped, with its parts', { purchase_order: 'PO-5010' }],
+  ["another's order, with its parts", { purchase_order: 'PO-5002', batch: null }],
   ["another's order, with its parts and batch", { purchase_order: 'PO-5002' }],
 ])('a certificate is matched by %s', (_, changes) => {
   expect(matched(changes).matches_batch).toBe('B-0001');

@@ -1,0 +1,53 @@
+import { daysIn, type DayOrder } from './dates';
+import type { DecimalSign } from './quantities';
+import type { Sheet } from './sheet';
+
+/** Signs of where a document was made. Each alone may mislead; what they say together decides. */
+const AMERICAN = [
+  /\b[A-Z]{2}\.?,?\s+\d{5}(?:-\d{4})?\b/,
+  /°\s?F\b|deg\.?\s?F\b/,
+  /\b(?:Inc|LLC|Corp)\b/,
+  /\(\d{3}\)\s?\d{3}-\d{4}|\b\d{3}[-.]\d{3}[-.]\d{4}\b/,
+  /\b(?:aluminum|center|color|authorized)\b/i,
+  /\bU\.?S\.?A\.?\b/,
+  /\b(?:mils?|microinch(?:es)?|ksi)\b/i,
+];
+const EUROPEAN = [
+  /\b(?:GmbH|AG|Ltd|Limited|plc|S\.?A\.?S?|S\.?r\.?l|B\.?V|Oy|AB|ApS|s\.?r\.?o)\b/,
+  /°\s?C\b|deg\.?\s?C\b/,
+  /\+\s?(?:3\d|4\d)[\s(\d]/,
+  /\b(?:aluminium|centre|colour|authorised|organisation)\b/i,
+  /\b[A-Z]{1,2}\d[A-Z\d]?\s+\d[A-Z]{2}\b/,
+  /\b(?:Deutschland|Germany|France|England|United Kingdom|UK|Italia|Nederland|Schweiz|Austria)\b/,
+  /[äöüßéèàçñ]/i,
+];
+
+/**
+ * Whether days in figures have the day or the month first.
+ *
+ * A day that can be read in one way only decides; without one, what else shows where the document comes from, when it
+ * speaks for one side clearly.
+ *
+ * @returns null where nothing tells.
+ */
+export function dayOrderOf(text: string, sheets: readonly Sheet[], decimal: DecimalSign): DayOrder | null {
+  const shown = daysIn(text).map(({ shows, dayFirst, monthFirst }) => ({
+    shows,
+    named: dayFirst === monthFirst,
+  }));
+  const count = (order: DayOrder, named: boolean): number =>
+    shown.filter((day) => day.shows === order && day.named === named).length;
+  const certain = count('day_first', false) - count('month_first', false);
+  if (certain !== 0) return certain > 0 ? 'day_first' : 'month_first';
+  if (count('day_first', false) > 0) return null;
+  const hits = (signs: readonly RegExp[]): number => signs.filter((sign) => sign.test(text)).length;
+  const a4 = sheets.filter(({ width, height }) => Math.abs(Math.max(width, height) - 842) < 4).length;
+  const letter = sheets.filter(({ width, height }) => Math.abs(Math.max(width, height) - 792) < 4).length;
+  const european =
+    hits(EUROPEAN) + (decimal === ',' ? 2 : 0) + (a4 > 0 ? 1 : 0) + Math.min(1, count('day_first', true));
+  const american = hits(AMERICAN) + (letter > 0 ? 1 : 0) + 2 * Math.min(1, count('month_first', true));
+  if (european === american || Math.max(european, american) < 2) return null;
+  // Clear means twice as much, not a majority of one.
+  if (Math.max(european, american) < 2 * Math.min(european, american)) return null;
+  return european > american ? 'day_first' : 'month_first';
+}

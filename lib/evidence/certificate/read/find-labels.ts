@@ -1,0 +1,232 @@
+import { folded } from './fold';
+import { LABELS, type LabelKey } from './labels';
+import { stepsIn, type Step } from './steps';
+
+export interface FoundLabel {
+  readonly key: LabelKey;
+  /** The label itself, in small letters: "type" is another question than "class". */
+  readonly words: string;
+  /** What else the same label asks for: "Part No. / Rev". */
+  readonly also: readonly LabelKey[];
+  /** The step that it speaks of: "Solution temperature". */
+  readonly step: Step | null;
+  readonly start: number;
+  /** Where its value may begin: behind the colon, the dots, the unit in brackets. */
+  readonly end: number;
+  /** A colon, dots or the like follow: it cannot be a word of a sentence. */
+  readonly marked: boolean;
+  /** What stands in brackets or behind it and is no value: a unit, a scale. */
+  readonly qualifier: string;
+  /** Nothing follows in the text it was found in. */
+  readonly whole: boolean;
+}
+
+interface Phrase {
+  readonly key: LabelKey;
+  readonly pattern: RegExp;
+  readonly needsColon: boolean;
+  readonly numbered: boolean;
+}
+
+const WORDS: Readonly<Record<string, string>> = {
+  no: String.raw`(?:n[°ºo]s?|nr|num|numbers?|nbr|numero|nummer|#)`,
+  cert: String.raw`cert(?:ificate|ification|ificat|if)?`,
+  spec: String.raw`spec(?:ification|s)?`,
+  temp: String.raw`temp`,
+  '%': '%',
+  '&': '&',
+};
+
+const BETWEEN = String.raw`[\s./_\-]{0,3}`;
+
+function patternOf(words: readonly string[]): RegExp {
+  const parts = words.map((word, index) => {
+    const may = word.endsWith('?');
+    const plain = may ? word.slice(0, -1) : word;
+    const said = WORDS[plain] ?? folded(plain);
+    const before = index === 0 ? '' : BETWEEN;
+    return may ? `(?:${before}${said})?` : `${before}${said}`;
+  });
+  return new RegExp(`${parts.join('').replace(/\\{2}/g, '\\')}(?:(?<=#)|(?![a-z0-9]))`, 'y');
+}
+
+/** By first letter, the longest first: "part no" is not "part". */
+const PHRASES: ReadonlyMap<string, readonly Phrase[]> = indexed();
+
+function indexed(): Map<string, Phrase[]> {
+  const all = (Object.keys(LABELS) as LabelKey[]).flatMap((key) =>
+    LABELS[key].split(/,\s*/).map((phrase) => ({ key, phrase: phrase.trim() })),
+  );
+  all.sort((a, b) => b.phrase.length - a.phrase.length);
+  const byLetter = new Map<string, Phrase[]>();
+  for (const { key, phrase } of all) {
+    const needsColon = phrase.endsWith(':');
+    const words = phrase.replace(/\s*:$/, '').split(' ');
+    const entry = {
+      key,
+      needsColon,
+      pattern: patternOf(words),
+      numbered: words.some((word) => word === 'no' || word === 'no?'),
+    };
+    const letter = folded(words[0] ?? '').charAt(0);
+    const first = words[0]?.replace('?', '') === 'no' ? ['n', '#'] : [letter];
+    for (const sign of first) byLetter.set(sign, [...(byLetter.get(sign) ?? []), entry]);
+  }
+  return byLetter;
+}
+
+/** Numbers of boxes and bullets before a label: "1. Customer", "(3) Part No.", "• Date". */
+const LEAD = /^\s*(?:\d{1,2}[.)]\s*|[a-z]\)\s*|\(\s*[\da-z]{1,2}\s*\)\s*|[•*▪□☐✓>·]\s*|[-–]\s+)?/i;
+
+/** What parts label and value: a colon, an equals sign, dots of a leader, a dash with room around it. */
+const MARK = /^\s*(?:[.·…_]{2,}\s*:?|(?:\s\.){2,}\s*:?|[:;=]+|\s[-–—]+\s|[-–—]>|»|\|)\s*(?:[.·…_]{3,}\s*)?/;
+
+const UNIT =
+  /^[,\s]*(?:\(([^()]{1,40})\)|\[([^[\]]{1,40})\]|((?:in\s+)?(?:°\s?[FC]|deg\.?\s?[FC]|[FC]|HR(?:[A-H]|15T|30T|15N|30N|45N)W?|HV\s?\d{0,2}|HBW?|%\s?IACS|IACS|MS\/m|µ-?in|μ-?in|uin|microinch(?:es)?|mils?|µm|μm|um|mm|inch(?:es)?|ksi|MPa|min|mins|minutes|hrs?|hours|h|sec|seconds|s|pcs|ea|%)\.?)(?=\s*(?:[:;=]|$)))/i;
+
+/** The label that a text begins with; null where it begins with none. */
+export function labelAtStart(text: string): FoundLabel | null {
+  const lead = LEAD.exec(text)?.[0].length ?? 0;
+  return labelAt(text, folded(text), lead, true);
+}
+
+/**
+ * All labels of a text: the one that it begins with, and those further on that a colon or "No." sets apart from the words of
+ * a sentence.
+ */
+export function labelsIn(text: string): FoundLabel[] {
+  const plain = folded(text);
+  const first = labelAtStart(text);
+  const found: FoundLabel[] = first ? [first] : [];
+  let at = first ? first.end : 0;
+  while (at < text.length) {
+    const startsWord =
+      at > 0 && /[^a-z0-9&]/.test(plain.charAt(at - 1)) && /[\p{L}#%]/u.test(text.charAt(at));
+    const label = startsWord ? labelAt(text, plain, at, false) : null;
+    if (label) found.push(label);
+    at = label ? label.end : at + 1;
+  }
+  return found;
+}
+
+function labelAt(text: string, plain: string, at: number, first: boolean): FoundLabel | null {
+  const bare = phraseAt(plain, at);
+  const stepped = bare && /\s/.test(plain.slice(at, bare.end)) ? null : steppedAt(text, plain, at);
+  const best = stepped ?? (bare ? { ...bare, step: null } : null);
+  if (!best) return null;
+  const tail = tailOf(text, plain, best.end, best.phrase.key);
+  if (best.phrase.needsColon && !/[:]/.test(text.slice(best.end, tail.end))) return null;
+  const standsOut =
+    first || tail.marked || (best.phrase.numbered && /[#.]\s*$|no|num/.test(plain.slice(at, best.end)));
+  if (!standsOut) return null;
+  return {
+    key: best.phrase.key,
+    words: text.slice(at, best.end).toLowerCase(),
+    also: tail.also,
+    step: best.step,
+    start: at,
+    end: tail.end,
+    marked: tail.marked,
+    qualifier: tail.qualifier,
+    whole: tail.end >= text.trimEnd().length,
+  };
+}
+
+function phraseAt(plain: string, at: number): { phrase: Phrase; end: number } | null {
+  let best: { phrase: Phrase; end: number } | null = null;
+  for (const phrase of PHRASES.get(plain.charAt(at)) ?? []) {
+    phrase.pattern.lastIndex = at;
+    const match = phrase.pattern.exec(plain);
+    if (!match) continue;
+    const end = at + match[0].length;
+    if (!best || end > best.end) best = { phrase, end };
+  }
+  return best;
+}
+
+/** A step before what is asked of it: "Solution temperature", "Age - start", "Temper soak time". */
+function steppedAt(
+  text: string,
+  plain: string,
+  at: number,
+): { phrase: Phrase; end: number; step: Step } | null {
+  const [step] = stepsIn(text.slice(at));
+  if (!step || step.start !== 0) return null;
+  const gap = /^\s*(?:cycle|treatment|heat treat(?:ment)?|furnace|bake)?[\s\-–—,/:]{0,4}/i.exec(
+    text.slice(at + step.end),
+  );
+  for (const skip of [
+    gap?.[0].length ?? 0,
+    /^[\s\-–—,/:]*/.exec(text.slice(at + step.end))?.[0].length ?? 0,
+  ]) {
+    const found = phraseAt(plain, at + step.end + skip);
+    if (found && ATTRIBUTES.has(found.phrase.key)) return { ...found, step: step.step };
+  }
+  return null;
+}
+
+/** What is asked of a step. */
+const ATTRIBUTES: ReadonlySet<LabelKey> = new Set([
+  'temperature',
+  'minutes',
+  'time_in',
+  'time_out',
+  'date',
+  'furnace',
+  'quench_medium',
+]);
+
+interface Tail {
+  readonly end: number;
+  readonly marked: boolean;
+  readonly qualifier: string;
+  readonly also: readonly LabelKey[];
+}
+
+/** What may stand between a label and its value: another language, a second label, a unit, a colon. */
+function tailOf(text: string, plain: string, from: number, key: LabelKey): Tail {
+  let end = from + (/^\.(?![.\s]*\.)/.exec(text.slice(from))?.[0].length ?? 0);
+  let qualifier = '';
+  const also: LabelKey[] = [];
+  for (let turn = 0; turn < 3; turn += 1) {
+    const second = secondLabel(text, plain, end);
+    if (second) {
+      if (second.key && second.key !== key && !also.includes(second.key)) also.push(second.key);
+      end = second.end;
+      continue;
+    }
+    const [whole = '', inBrackets, inSquare, bare] = UNIT.exec(text.slice(end)) ?? [];
+    if (whole === '') break;
+    const words = inBrackets ?? inSquare ?? bare ?? '';
+    const within = inBrackets === undefined ? null : phraseAt(plain, end + text.slice(end).indexOf('(') + 1);
+    // A value in brackets with digits in it is a value: "(12 pcs)".
+    if (inBrackets !== undefined && /\d{2}/.test(inBrackets) && !/hr|hv|hb|mm/i.test(inBrackets)) break;
+    if (!within) qualifier = `${qualifier} ${words}`.trim();
+    end += whole.length;
+  }
+  const mark = MARK.exec(text.slice(end));
+  return { end: end + (mark?.[0].length ?? 0), marked: mark !== null, qualifier, also };
+}
+
+/** Behind a stroke, an ampersand or "and": the same in another language, or what else is asked for. */
+function secondLabel(
+  text: string,
+  plain: string,
+  from: number,
+): { key: LabelKey | null; end: number } | null {
+  const bridge = /^\s*(?:[/|&+]|and\b|et\b|und\b|[-–](?=\s))\s*/i.exec(text.slice(from));
+  if (!bridge) return furtherWords(text, plain, from);
+  const at = from + bridge[0].length;
+  const found = phraseAt(plain, at);
+  if (found) return { key: found.phrase.key, end: found.end + (text.charAt(found.end) === '.' ? 1 : 0) };
+  const unknown = /^[\p{L}][\p{L}\s.°'’\-]{1,38}(?=\s*(?:[:(]|$))/u.exec(text.slice(at));
+  return unknown && bridge[0].includes('/') ? { key: null, end: at + unknown[0].length } : null;
+}
+
+/** "Soak time at temperature", "Hardness required": a second label is a part of the first when nothing else follows it. */
+function furtherWords(text: string, plain: string, from: number): { key: LabelKey; end: number } | null {
+  const gap = /^[\s,]+/.exec(text.slice(from))?.[0].length ?? 0;
+  const found = gap > 0 ? phraseAt(plain, from + gap) : null;
+  if (!found || !/^\.?\s*(?:$|[:;=(]|\.{3})/.test(text.slice(found.end))) return null;
+  return { key: found.phrase.key, end: found.end };
+}

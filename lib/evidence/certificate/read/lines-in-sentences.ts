@@ -1,0 +1,90 @@
+import { passageFrom, type Passage } from '../../layout/passage';
+import { countIn, partIn, readingAt, type Reading } from './codes';
+import { beginsWithDay } from './identity';
+import type { ReadLine } from './lines';
+import type { Paper } from './paper';
+
+const SENTENCE_TRUST = 0.8;
+
+const PART =
+  /\b(?:p\/?n\.?|part\s*(?:numbers?|no\.?|nos\.?|#)|parts?|drawing|dwg\.?|teile?-?(?:nr\.?|nummer)|r[eé]f(?:[eé]rence)?\.?)\s*:?\s*(?=[A-Z0-9./-]*\d)/giu;
+const COUNTS = {
+  accepted: [
+    /(\d[\d,]*)\s*(?:\(\w+\)\s*)?(?:pcs?\.?|pieces?|parts?|ea\.?|units?)?\s*(?:were\s+|was\s+|are\s+|have been\s+)?(?:found\s+)?(?:accepted|acceptable|conforming|passed|good|acc\.|angenommen|accept[eé]es?|aceptadas?)/iu,
+    /\b(?:accepted|acc|passed)\s*[:=]?\s*(\d[\d,]*)/iu,
+  ],
+  rejected: [
+    /(\d[\d,]*|none|no|zero|nil)\s*(?:\(\w+\)\s*)?(?:pcs?\.?|pieces?|parts?|ea\.?|units?)?\s*(?:were\s+|was\s+|are\s+|have been\s+)?(?:rejected|rej\.|scrapped|rejects?\b|nonconforming|abgelehnt|rebut[eé]es?|rechazadas?)/iu,
+    /\b(?:rejected|rejects|rej)\s*[:=]?\s*(\d[\d,]*|none|nil)/iu,
+  ],
+  quantity: [
+    /\b(?:qty|quantity|menge|quantit[eé]|cantidad)\.?\s*(?:of\s+)?[:=]?\s*(\d[\d,]*)/iu,
+    /(?<![\d.,/-])(\d[\d,]*)\s*(?:\(\w+\)\s*)?(?:pcs?\b\.?|pieces?\b|ea\b\.?|each\b|units?\b|parts?\b|st(?:ü|u)ck\b|pi[eè]ces\b|piezas\b)/iu,
+  ],
+} as const;
+
+/** Lines told in sentences: "12 pcs of P/N 10-200 Rev A, lot L1, accepted 12, rejected 0". */
+export function linesInSentences(paper: Paper): ReadLine[] {
+  return paper.paragraphs.flatMap((paragraph) => linesIn(paragraph, paper));
+}
+
+function linesIn(passage: Passage, paper: Paper): ReadLine[] {
+  const parts = [...passage.text.matchAll(PART)];
+  return parts.flatMap((match, index) => {
+    const at = match.index + match[0].length;
+    const before = parts.length === 1 ? 0 : index === 0 ? 0 : match.index;
+    const until = parts[index + 1]?.index ?? passage.text.length;
+    const read = partIn(passageFrom(passage, at, until), beginsWithDay);
+    if (!read) return [];
+    const trust = SENTENCE_TRUST;
+    const line: ReadLine = { part: { ...read, value: read.value.part, trust } };
+    if (read.value.rev !== null) line.rev = { ...read, value: read.value.rev, trust };
+    const around = passageFrom(passage, before, until);
+    for (const field of ['accepted', 'rejected', 'quantity'] as const) {
+      const count =
+        countSaid(around, COUNTS[field], paper) ??
+        (parts.length === 1 && field !== 'quantity' ? countElsewhere(paper, field) : null);
+      if (count) line[field] = { ...count, trust };
+    }
+    const lot = said(
+      around,
+      /\blot\s*(?:no\.?|number|#|code)?\s*:?\s*((?=[A-Z0-9./-]*\d)[A-Z0-9][A-Z0-9./-]*[A-Z0-9]|\d+)/iu,
+    );
+    if (lot) line.lot = { ...lot, trust };
+    const material = said(
+      around,
+      /\b(?:material|matl\.?|made (?:of|from)|werkstoff|mati[eè]re)\s*:?\s*((?:alclad\s+|al\s+)?[A-Z0-9][\w./-]*(?:\s+(?:sheet|plate|bar|tube|steel|alloy|aluminum|aluminium|clad|rod|forging|casting|extrusion|0?\.\d+))*)/iu,
+    );
+    if (material && /\d/.test(material.value)) line.material = { ...material, trust: 0.7 };
+    return [line];
+  });
+}
+
+function countElsewhere(paper: Paper, field: 'accepted' | 'rejected'): Reading<number> | null {
+  for (const paragraph of paper.paragraphs) {
+    const found = countSaid(paragraph, COUNTS[field], paper);
+    if (found) return found;
+  }
+  return null;
+}
+
+function countSaid(passage: Passage, patterns: readonly RegExp[], paper: Paper): Reading<number> | null {
+  for (const pattern of patterns) {
+    const match = pattern.exec(passage.text);
+    const written = match?.[1];
+    if (!match || written === undefined) continue;
+    if (/^(?:no|none|zero|nil)$/i.test(written))
+      return readingAt(passage, match.index, match.index + match[0].length, 0);
+    const at = match.index + match[0].indexOf(written);
+    const count = countIn(passageFrom(passage, at, at + written.length), paper.decimal);
+    if (count) return readingAt(passage, match.index, match.index + match[0].length, count.value);
+  }
+  return null;
+}
+
+function said(passage: Passage, pattern: RegExp): Reading<string> | null {
+  const match = pattern.exec(passage.text);
+  return match
+    ? readingAt(passage, match.index, match.index + match[0].length, (match[1] ?? '').replace(/[.,]$/, ''))
+    : null;
+}

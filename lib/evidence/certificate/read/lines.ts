@@ -1,0 +1,212 @@
+import { TRUST, type Answer, type AnswerValue } from './answers';
+import { countIn, partIn, revisionIn, wordsIn, codeIn, type Reading } from './codes';
+import { beginsWithDay } from './identity';
+import type { LabelKey } from './labels';
+import type { Paper } from './paper';
+import { linesInSentences } from './lines-in-sentences';
+import { isNext } from './specification';
+import { passageFrom as partOf } from '../../layout/passage';
+
+export interface ReadCell<Value> extends Reading<Value> {
+  readonly trust: number;
+}
+
+/** A line of the certificate as far as it was read. */
+export interface ReadLine {
+  part?: ReadCell<string>;
+  rev?: ReadCell<string>;
+  accepted?: ReadCell<number>;
+  rejected?: ReadCell<number>;
+  /** Pieces without a word on whether they were accepted. */
+  quantity?: ReadCell<number>;
+  received?: ReadCell<number>;
+  material?: ReadCell<string>;
+  lot?: ReadCell<string>;
+  heat?: ReadCell<string>;
+  serials?: ReadCell<readonly string[]>;
+}
+
+type Writer = (line: ReadLine, value: AnswerValue, paper: Paper) => boolean;
+
+const cell = <Value>(reading: Reading<Value> | null, { how }: AnswerValue): ReadCell<Value> | null =>
+  reading && { ...reading, trust: TRUST[how] };
+
+/** How each label's value is read into a line; false where it is not of the label's shape. */
+const WRITERS: Partial<Record<LabelKey, Writer>> = {
+  part_number: (line, value) => {
+    const read = cell(partIn(value.passage, beginsWithDay), value);
+    if (!read || line.part) return false;
+    line.part = { ...read, value: read.value.part };
+    if (read.value.rev !== null) line.rev ??= { ...read, value: read.value.rev };
+    return true;
+  },
+  revision: (line, value) => {
+    const read = cell(revisionIn(value.passage), value);
+    if (read) line.rev ??= read;
+    return read !== null;
+  },
+  quantity: counted('quantity'),
+  quantity_accepted: counted('accepted'),
+  quantity_rejected: counted('rejected'),
+  quantity_received: counted('received'),
+  material: (line, value) => {
+    const read = cell(wordsIn(value.passage), value);
+    if (read && read.value.length <= 80) line.material ??= read;
+    return read !== null;
+  },
+  lot: coded('lot'),
+  heat: coded('heat'),
+  serial: (line, value) => {
+    const read = cell(wordsIn(value.passage), value);
+    const serials = read?.value.split(/[,;\s]+/).filter((one) => /\d/.test(one)) ?? [];
+    if (read && serials.length > 0) line.serials ??= { ...read, value: serials };
+    return serials.length > 0;
+  },
+};
+
+function counted(field: 'quantity' | 'accepted' | 'rejected' | 'received'): Writer {
+  return (line, value, paper) => {
+    const read = cell(countIn(value.passage, paper.decimal), value);
+    if (read) line[field] ??= read;
+    return read !== null;
+  };
+}
+
+function coded(field: 'lot' | 'heat'): Writer {
+  return (line, value) => {
+    const read = cell(codeIn(value.passage, beginsWithDay), value);
+    if (read) line[field] ??= { ...read, value: read.value.replace(/^lot[\s-]+(?=\w)/i, '') };
+    return read !== null;
+  };
+}
+
+/** All lines: of tables, of the form's fields, of sentences, whichever the certificate has. */
+export function readLines(paper: Paper): ReadLine[] {
+  const written = paper.answers.filter(({ key, also }) => WRITERS[key] ?? also.some((one) => WRITERS[one]));
+  const fromTables = tableLines(paper, written);
+  const inForms = formLines(
+    paper,
+    written.filter(({ row }) => row === null || !fromTables.rows.has(row)),
+    fromTables.lines.length > 0,
+  );
+  const lines = fromTables.lines.length > 0 ? fromTables.lines : inForms.lines;
+  const found = lines.length > 0 ? lines : linesInSentences(paper);
+  completeFrom(found, inForms.shared);
+  if (found.length === 1 && lines.length > 0) completeFrom(found, linesInSentences(paper)[0] ?? {});
+  return withoutRepeats(found);
+}
+
+function tableLines(paper: Paper, answers: readonly Answer[]): { lines: ReadLine[]; rows: Set<string> } {
+  const rows = new Map<string, Answer[]>();
+  for (const answer of answers)
+    if (answer.row !== null) rows.set(answer.row, [...(rows.get(answer.row) ?? []), answer]);
+  const lines: ReadLine[] = [];
+  const used = new Set<string>();
+  for (const [row, cells] of rows) {
+    const parts = cells.filter(({ key, also }) => key === 'part_number' || also.includes('part_number'));
+    // Without anything else beside it, it is no line but a field of a form whose values stand below.
+    if (parts.length !== 1) continue;
+    const line: ReadLine = {};
+    for (const answer of cells) write(line, answer, paper, cells);
+    if (!line.part) continue;
+    lines.push(line);
+    used.add(row);
+  }
+  return { lines, rows: used };
+}
+
+/** Writes what a label asks for, and what else it asks for behind a stroke. */
+function write(line: ReadLine, answer: Answer, paper: Paper, beside: readonly Answer[]): boolean {
+  if (answer.key === 'revision' && ofSpecification(paper, answer, beside)) return false;
+  const asked = [answer.key, ...answer.also].filter((key) => WRITERS[key]);
+  for (const value of answer.values) {
+    const parts = asked.length > 1 ? splitAtStrokes(value, asked.length) : null;
+    const done = asked.map((key, index) => WRITERS[key]?.(line, parts?.[index] ?? value, paper) ?? false);
+    if (done.some(Boolean)) return true;
+  }
+  return false;
+}
+
+/** "12 / 0" under "Accepted / Rejected"; null where there are not as many parts as questions. */
+function splitAtStrokes(value: AnswerValue, count: number): AnswerValue[] | null {
+  const { passage } = value;
+  const cuts = [...passage.text.matchAll(/\s*[/|;]\s*|\s+(?=\d+\s*$)/g)].filter(
+    (_, index) => index < count - 1,
+  );
+  if (cuts.length !== count - 1) return null;
+  const edges = [0, ...cuts.flatMap((cut) => [cut.index, cut.index + cut[0].length]), passage.text.length];
+  return Array.from({ length: count }, (_, index) => ({
+    ...value,
+    passage: partOf(passage, edges[2 * index] ?? 0, edges[2 * index + 1] ?? passage.text.length),
+  }));
+}
+
+function ofSpecification(paper: Paper, { order, row }: Answer, beside: readonly Answer[]): boolean {
+  const owners = row === null ? paper.answers : beside;
+  return owners.some(
+    (owner) => owner.key === 'specification' && owner.row === row && isNext(paper, owner, order),
+  );
+}
+
+/** Fields of a form in reading order: each part number begins a line, what stands before the first belongs to it too. */
+function formLines(
+  paper: Paper,
+  answers: readonly Answer[],
+  onlyShared: boolean,
+): { lines: ReadLine[]; shared: ReadLine } {
+  const lines: ReadLine[] = [];
+  const before: ReadLine = {};
+  for (const answer of answers) {
+    const starts = answer.key === 'part_number' || answer.also.includes('part_number');
+    if (onlyShared) {
+      if (!starts) write(before, answer, paper, []);
+      continue;
+    }
+    const last = lines[lines.length - 1];
+    const line: ReadLine = starts || !last ? {} : last;
+    if (starts) {
+      if (!write(line, answer, paper, [])) continue;
+      if (line.part && last?.part && last.part.value === line.part.value)
+        Object.assign(last, { ...line, ...last });
+      else lines.push(line);
+    } else write(last ?? before, answer, paper, []);
+  }
+  const [first] = lines;
+  if (first && lines.length === 1) completeFrom([first], before);
+  return { lines, shared: before };
+}
+
+/** What is stated once for the whole certificate holds for each line that says nothing else; counts only for a single line. */
+function completeFrom(lines: readonly ReadLine[], shared: ReadLine): void {
+  for (const line of lines) {
+    if (shared.material) line.material ??= shared.material;
+    if (shared.lot) line.lot ??= shared.lot;
+    if (shared.heat) line.heat ??= shared.heat;
+    if (lines.length > 1) continue;
+    const { accepted, rejected, quantity, received, rev, serials, part } = shared;
+    if (part) line.part ??= part;
+    if (accepted) line.accepted ??= accepted;
+    if (rejected) line.rejected ??= rejected;
+    if (quantity) line.quantity ??= quantity;
+    if (received) line.received ??= received;
+    if (rev) line.rev ??= rev;
+    if (serials) line.serials ??= serials;
+  }
+}
+
+/** The same line once more on a later page, or in the text and the table, is one. */
+function withoutRepeats(lines: readonly ReadLine[]): ReadLine[] {
+  const key = ({ part, lot, accepted, quantity }: ReadLine): string =>
+    [part?.value, lot?.value, accepted?.value ?? quantity?.value].join('|');
+  return lines.filter((line, index) => lines.findIndex((other) => key(other) === key(line)) === index);
+}
+
+/**
+ * Pieces accepted: as stated, or the pieces of the line where none were rejected and no other count is given.
+ */
+export function acceptedOf({ accepted, quantity, received, rejected }: ReadLine): ReadCell<number> | null {
+  if (accepted) return accepted;
+  if (quantity && (!rejected || rejected.value === 0)) return quantity;
+  if (quantity && rejected && received && quantity.value + rejected.value === received.value) return quantity;
+  return received && rejected?.value === 0 ? { ...received, trust: received.trust * 0.8 } : null;
+}

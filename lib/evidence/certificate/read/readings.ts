@@ -1,0 +1,237 @@
+import { findSpecifications } from '../../../trade/lineage/recognise-specification';
+import { boxAround } from '../../layout/box';
+import { passageFrom, spotIn, type Passage, type Spot } from '../../layout/passage';
+import { TRUST } from './answers';
+import { daysIn } from './dates';
+import type { LabelKey } from './labels';
+import type { Paper } from './paper';
+import { numberFrom, type DecimalSign } from './quantities';
+
+export interface ReadReading {
+  readonly kind: ReadingKind;
+  readonly unit: string | null;
+  readonly values: readonly number[];
+  readonly spot: Spot;
+  readonly trust: number;
+}
+
+export type ReadingKind =
+  'hardness' | 'conductivity' | 'thickness' | 'tensile' | 'yield' | 'elongation' | 'coating_weight';
+
+interface Unit {
+  readonly pattern: RegExp;
+  /** One way of writing it. */
+  readonly name: string;
+  /** Outside of it no such reading exists. */
+  readonly range: readonly [number, number];
+}
+
+const ROCKWELL = String.raw`H\s?R\s?`;
+const UNITS: Record<ReadingKind, readonly Unit[]> = {
+  hardness: [
+    ...['15T', '30T', '45T', '15N', '30N', '45N', 'A', 'B', 'C', 'E', 'F', 'G', 'H', 'K'].map((scale) => ({
+      pattern: new RegExp(
+        `(?<![\\p{L}])(?:${ROCKWELL}${scale}W?|R\\s?${scale}|Rockwell\\s?["“']?${scale}["”']?)(?![\\p{L}])`,
+        'iu',
+      ),
+      name: `HR${scale}`,
+      range: [10, 130] as const,
+    })),
+    { pattern: /(?<![\p{L}])(?:HV\s?\d{0,2}|DPH|VHN|Vickers)(?![\p{L}])/iu, name: 'HV', range: [30, 1100] },
+    { pattern: /(?<![\p{L}])(?:HBW?|BHN|Brinell)(?![\p{L}])/iu, name: 'HBW', range: [30, 700] },
+  ],
+  conductivity: [
+    { pattern: /%?\s?I\.?A\.?C\.?S\.?/iu, name: '%IACS', range: [10, 65] },
+    { pattern: /MS\s?\/\s?m/iu, name: 'MS/m', range: [5, 40] },
+  ],
+  thickness: [
+    {
+      pattern: /(?:µ|μ|u)[\s-]?in(?:ch(?:es)?)?\b|micro-?\s?inch(?:es)?|millionths/iu,
+      name: 'microinch',
+      range: [2, 5000],
+    },
+    { pattern: /(?<![\p{L}])mils?(?![\p{L}-])/iu, name: 'mil', range: [0.005, 10] },
+    {
+      pattern: /(?:µ|μ)m|(?<![\p{L}])(?:um|microns?|micrometers?|micrometres?|mikrometer)(?![\p{L}])/iu,
+      name: 'µm',
+      range: [0.05, 250],
+    },
+    {
+      pattern: /(?<![\p{L}])(?:inch(?:es)?|in\.?)(?![\p{L}])|(?<=\d)["”″]/iu,
+      name: 'in',
+      range: [0.000005, 0.0099],
+    },
+    { pattern: /(?<![\p{L}])mm(?![\p{L}])/iu, name: 'mm', range: [0.0001, 0.25] },
+  ],
+  tensile: [
+    { pattern: /(?<![\p{L}])ksi(?![\p{L}])/iu, name: 'ksi', range: [10, 400] },
+    { pattern: /(?<![\p{L}])(?:MPa|N\/mm[²2]?)(?![\p{L}])/iu, name: 'MPa', range: [60, 2800] },
+    { pattern: /(?<![\p{L}])psi(?![\p{L}])/iu, name: 'psi', range: [9000, 400000] },
+  ],
+  yield: [
+    { pattern: /(?<![\p{L}])ksi(?![\p{L}])/iu, name: 'ksi', range: [5, 400] },
+    { pattern: /(?<![\p{L}])(?:MPa|N\/mm[²2]?)(?![\p{L}])/iu, name: 'MPa', range: [30, 2800] },
+    { pattern: /(?<![\p{L}])psi(?![\p{L}])/iu, name: 'psi', range: [5000, 400000] },
+  ],
+  elongation: [{ pattern: /%/u, name: '%', range: [0.5, 80] }],
+  coating_weight: [
+    { pattern: /mg\s?\/\s?(?:sq\.?\s?)?ft(?:[²2])?|g\/m[²2]/iu, name: 'mg/ft²', range: [1, 10000] },
+  ],
+};
+
+const SAID: Record<ReadingKind, RegExp> = {
+  hardness: /\b(?:hardness|rockwell|brinell|vickers|h[aä]rte\w*|duret[eé]|dureza)\b/iu,
+  conductivity: /\b(?:conductivity|leitf[aä]higkeit|conductivit[eé]|conductividad)\b/iu,
+  thickness:
+    /\b(?:(?:coating|plating|plate|deposit|film|cadmium|zinc|local|average)\s+)?(?:thickness(?:es)?|schichtdicke|[eé]paisseur|espesor)\b/iu,
+  tensile: /\b(?:tensile|u\.?t\.?s\.?|zugfestigkeit)\b/iu,
+  yield: /\b(?:yield|streckgrenze)\b/iu,
+  elongation: /\b(?:elongation|bruchdehnung)\b/iu,
+  coating_weight: /\b(?:coating|film) weight\b/iu,
+};
+
+const KINDS = Object.keys(UNITS) as ReadingKind[];
+const isKind = (key: LabelKey): key is ReadingKind & LabelKey => (KINDS as string[]).includes(key);
+
+/** All readings: of the forms and tables; where those have none of a kind, of the sentences. */
+export function readReadings(paper: Paper): ReadReading[] {
+  const asked: (ReadReading & { readonly group: string })[] = [];
+  for (const answer of paper.answers) {
+    if (!isKind(answer.key) || answer.also.includes('requirement')) continue;
+    const kind = answer.key;
+    const values = [...answer.values].sort((a, b) => Number(b.how === 'line') - Number(a.how === 'line'));
+    for (const { passage, how } of values) {
+      const found = valuesIn(passage, kind, `${answer.qualifier} ${answer.words}`, paper.decimal);
+      if (!found) continue;
+      const group = answer.row?.split('.').slice(0, 2).join('.') ?? '';
+      asked.push({ kind, ...found, trust: TRUST[how], group });
+      break;
+    }
+  }
+  const kinds = new Set(asked.map(({ kind }) => kind));
+  const said = paper.paragraphs.flatMap((paragraph) => inSentences(paragraph, paper, kinds));
+  return merged([...asked, ...said]);
+}
+
+/** Readings of one kind and unit are one series: rows of a table, places of a form. The same series twice is once. */
+function merged(readings: readonly (ReadReading & { readonly group: string })[]): ReadReading[] {
+  const series: (ReadReading & { readonly group: string })[] = [];
+  for (const reading of readings) {
+    const at = series.findIndex(
+      ({ kind, unit }) =>
+        kind === reading.kind && (unit === reading.unit || unit === null || reading.unit === null),
+    );
+    const known = series[at];
+    if (!known) series.push(reading);
+    else if (known.unit === null && reading.unit !== null && String(known.values) === String(reading.values))
+      series[at] = reading;
+    else if (
+      !isWithin(reading.values, known.values) ||
+      (reading.group !== '' && reading.group === known.group)
+    )
+      series[at] = {
+        ...known,
+        values: [...known.values, ...reading.values],
+        spot: around(known.spot, reading.spot),
+      };
+  }
+  return series.map(({ kind, unit, values, spot, trust }) => ({ kind, unit, values, spot, trust }));
+}
+
+const isWithin = (few: readonly number[], many: readonly number[]): boolean =>
+  few.every((value) => many.includes(value));
+
+const around = (a: Spot, b: Spot): Spot =>
+  a.page === b.page ? { ...a, raw: `${a.raw} ${b.raw}`, box: boxAround([a.box, b.box]) } : a;
+
+/** Limits are not readings: "(63 min)", "required: 28.5 - 32.5", "≥ 63 HRB". */
+const LIMITS: readonly RegExp[] = [
+  /\([^()]*(?:\bmin|\bmax|req|spec|limit|≥|≤|[<>]|accept|soll|\bto\b)[^()]*\)?/giu,
+  /(?:\breq(?:uire(?:ment|d)s?|'?d|\.)?|\bspec(?:ification|ified|\.)?|\bmin(?:imum|\.)?|\bmax(?:imum|\.)?|\blimits?|\bnominal|\btarget|\bsoll\w*|\bavg\.?|\baverage|\bmean|\bmittel\w*|≥|≤|>=|<=|[<>])\s*(?:is|of|value|range|limits?)?\s*:?\s*(?:[A-Z%/µμ]{1,6}\s*)?\d+(?:[.,]\d+)?(?:\s*(?:-|–|to|\/)\s*\d+(?:[.,]\d+)?)?\s*(?:[%A-Za-zµμ/°]{1,10})?(?:\s*(?:min|max)\w*)?/giu,
+  /\d+(?:[.,]\d+)?\s*(?:[%A-Za-zµμ/]{0,10})\s*(?:\bmin(?:imum)?\b|\bmax(?:imum)?\b|\breq(?:uired|'?d)\b)\.?(?!\s*[:=])/giu,
+  /\b(?:specimens?|samples?|test\s?(?:piece)?s?|pieces?|pc|no\.?|#|reading|probe|s\/?n)\s*(?:no\.?\s*|#\s*)?\d{1,3}\s*[:.)=]/giu,
+  /\d+\s*(?:readings?|places?|pcs?|pieces?|samples?|specimens?|tests?|kgf?|kg|gf|g|kHz|measurements?|locations?|parts?)\b/giu,
+];
+
+function valuesIn(
+  passage: Passage,
+  kind: ReadingKind,
+  about: string,
+  sign: DecimalSign,
+): { values: number[]; unit: string | null; spot: Spot } | null {
+  const text = withoutLimits(passage.text, kind);
+  const unit =
+    UNITS[kind].find(({ pattern }) => pattern.test(text)) ??
+    UNITS[kind].find(({ pattern }) => pattern.test(about)) ??
+    UNITS[kind].find(({ pattern }) => pattern.test(passage.text));
+  const figures = new RegExp(
+    sign === ','
+      ? String.raw`(?<![\p{L}\d.,])\d+(?:[.,]\d+)?`
+      : String.raw`(?<![\p{L}\d.])(?:\d{1,3}(?:,\d{3})+|\d*\.\d+|\d+)`,
+    'gu',
+  );
+  const found = [...text.matchAll(figures)].flatMap((match) => {
+    const end = match.index + match[0].length;
+    const value = numberFrom(match[0], sign);
+    const [low, high] = unit?.range ?? (kind === 'thickness' ? [NaN, NaN] : [5, 1200]);
+    return value >= low && value <= high && !/^[\p{L}]/u.test(stripUnit(text.slice(end), kind))
+      ? [{ value, start: match.index, end }]
+      : [];
+  });
+  const [first] = found;
+  const last = found[found.length - 1];
+  const spot = first && last && spotIn(passage, first.start, last.end);
+  if (!spot) return null;
+  return { values: found.map(({ value }) => value), unit: unit?.name ?? null, spot };
+}
+
+/** A unit right behind a figure is no word that it belongs to. */
+const stripUnit = (after: string, kind: ReadingKind): string => {
+  for (const { pattern } of UNITS[kind]) {
+    const match = pattern.exec(after);
+    if (match && match.index <= 1) return after.slice(match.index + match[0].length);
+  }
+  return after;
+};
+
+/** As long as before, with limits, days and specifications blanked out. */
+function withoutLimits(text: string, kind: ReadingKind): string {
+  let plain = text;
+  const blank = (start: number, end: number): void => {
+    plain = plain.slice(0, start) + ' '.repeat(end - start) + plain.slice(end);
+  };
+  for (const { at, length } of findSpecifications(plain)) blank(at, at + length);
+  for (const { start, end } of daysIn(plain)) blank(start, end);
+  if (kind !== 'hardness')
+    for (const match of plain.matchAll(/HR[A-Z0-9]{1,3}\s?\d+(?:[.,]\d+)?/g))
+      blank(match.index, match.index + match[0].length);
+  for (const pattern of LIMITS) {
+    for (const match of plain.matchAll(pattern)) blank(match.index, match.index + match[0].length);
+  }
+  return plain;
+}
+
+function inSentences(
+  passage: Passage,
+  paper: Paper,
+  known: ReadonlySet<ReadingKind>,
+): (ReadReading & { group: string })[] {
+  return KINDS.filter((kind) => !known.has(kind)).flatMap((kind) => {
+    const match = SAID[kind].exec(passage.text);
+    if (!match) return [];
+    const others = KINDS.filter((other) => other !== kind).flatMap((other) => {
+      const at = passage.text.slice(match.index + match[0].length).search(SAID[other]);
+      return at < 0 ? [] : [match.index + match[0].length + at];
+    });
+    const stop = passage.text.slice(match.index).search(/[.;](?:\s|$)/);
+    const sentence = stop < 0 ? passage.text.length : match.index + stop;
+    const region = passageFrom(passage, match.index + match[0].length, Math.min(sentence, ...others));
+    const found = valuesIn(region, kind, match[0], paper.decimal);
+    // In a sentence the unit must be said, or any figure would do.
+    return found &&
+      found.unit !== null &&
+      UNITS[kind].some(({ name, pattern }) => name === found.unit && pattern.test(region.text + match[0]))
+      ? [{ kind, ...found, trust: 0.7, group: '' }]
+      : [];
+  });
+}

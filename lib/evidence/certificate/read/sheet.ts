@@ -1,0 +1,248 @@
+import { heightOf, sharedAcross } from '../../layout/box';
+import { linesOf, type Line, type Segment } from '../../layout/lines';
+import { joined, passageFrom, spotIn, type Passage, type Spot } from '../../layout/passage';
+import { tablesOf, type Table } from '../../layout/tables';
+import type { Mark, Page } from '../../page';
+import { labelAtStart, labelsIn, type FoundLabel } from './find-labels';
+import { stepsIn, type Step } from './steps';
+
+/** A label and what may be its value, the likeliest first. */
+export interface Asked {
+  readonly label: FoundLabel;
+  readonly spot: Spot;
+  /** The step in whose part of the form it stands. */
+  readonly section: Step | null;
+  readonly values: readonly AskedValue[];
+  /** Reading order over the whole certificate. */
+  readonly order: number;
+}
+
+export interface AskedValue {
+  readonly passage: Passage;
+  /** Where it stands to its label; `line` is everything up to the line's next label. */
+  readonly how: 'same' | 'right' | 'below' | 'line';
+}
+
+/** A page taken apart. */
+export interface Sheet {
+  readonly page: number;
+  readonly width: number;
+  readonly height: number;
+  readonly origin: Page['origin'];
+  readonly lines: readonly Line[];
+  readonly marks: readonly Mark[];
+  readonly tables: readonly Table<FoundLabel>[];
+  readonly asked: readonly Asked[];
+  /** Sentences over all their lines; a line that is none stands alone. */
+  readonly paragraphs: readonly Passage[];
+}
+
+export function sheetOf(page: Page): Sheet {
+  const lines = linesOf(page);
+  const tables = tablesOf<FoundLabel>(lines, {
+    read: headingOf,
+    endsTable: ({ text }) => {
+      const label = labelAtStart(text);
+      return label !== null && label.marked && !label.whole && /:/.test(text.slice(0, label.end));
+    },
+    anchors: ({ key }) => key === 'part_number',
+  });
+  return {
+    page: page.number,
+    width: page.width,
+    height: page.height,
+    origin: page.origin,
+    lines,
+    marks: page.marks,
+    tables,
+    asked: askedOn(lines, tables, page.number),
+    paragraphs: paragraphsOf(lines),
+  };
+}
+
+/** What a cell of a table's heading asks for: a label, or a step whose figures stand under it. */
+function headingOf(text: string): FoundLabel | null {
+  const label = labelAtStart(text);
+  const [step] = stepsIn(text);
+  const names = step?.start === 0 && step.end >= text.trimEnd().length ? step.step : null;
+  if (label?.whole) return names && !label.step ? { ...label, step: names } : label;
+  if (!names) return null;
+  const end = text.length;
+  const words = text.toLowerCase();
+  return {
+    key: 'process',
+    words,
+    also: [],
+    step: names,
+    start: 0,
+    end,
+    marked: false,
+    qualifier: '',
+    whole: true,
+  };
+}
+
+interface Labelled {
+  readonly segment: Segment;
+  readonly labels: readonly FoundLabel[];
+  /** Begins with a label that has nothing but its value behind it in the same place, or elsewhere. */
+  readonly isLabel: boolean;
+}
+
+function askedOn(lines: readonly Line[], tables: readonly Table<FoundLabel>[], page: number): Asked[] {
+  const labelled = lines.map(({ segments }) =>
+    segments.map((segment): Labelled => {
+      const labels = labelsIn(segment.text);
+      return { segment, labels, isLabel: labels.some(({ whole, marked }) => whole || marked) };
+    }),
+  );
+  const asked: Asked[] = [];
+  labelled.forEach((row, index) => {
+    // The cells of a table's heading have their values in the table.
+    const inTable = tables.some(({ from, to }) => index >= from && index < to);
+    row.forEach(({ segment, labels }, place) => {
+      labels.forEach((label, turn) => {
+        if (inTable && (label.whole || !label.marked)) return;
+        const until = labels[turn + 1]?.start ?? segment.text.length;
+        const spot = spotIn(segment, label.start, label.end);
+        if (!spot) return;
+        const values = valuesOf({ label, until, segment, place, index, lines, labelled });
+        const section = sectionOf(lines, index, segment);
+        asked.push({ label, spot, section, values, order: page * 1e6 + index * 1000 + place * 10 + turn });
+      });
+    });
+  });
+  return asked;
+}
+
+interface Place {
+  readonly label: FoundLabel;
+  readonly until: number;
+  readonly segment: Segment;
+  readonly place: number;
+  readonly index: number;
+  readonly lines: readonly Line[];
+  readonly labelled: readonly (readonly Labelled[])[];
+}
+
+function valuesOf(where: Place): AskedValue[] {
+  const { label, until, segment } = where;
+  const same = passageFrom(segment, label.end, until);
+  const last = until === segment.text.length;
+  const right = last ? toTheRight(where) : [];
+  const below = last ? belowIt(where) : null;
+  const values: AskedValue[] = [];
+  if (/[\p{L}\p{N}]/u.test(same.text)) {
+    values.push({ passage: same, how: 'same' });
+    if (right.length > 0) values.push({ passage: joined([same, ...right]), how: 'line' });
+    return values;
+  }
+  const [next] = right;
+  if (next) values.push({ passage: next, how: 'right' });
+  if (right.length > 1) values.push({ passage: joined(right), how: 'line' });
+  if (below) {
+    const value: AskedValue = { passage: below, how: 'below' };
+    // Without a colon a label looks down first where its neighbour is no value but stands in another column's row.
+    if (next && !label.marked && startsLevel(segment, below) && !closeBy(segment, next))
+      values.unshift(value);
+    else values.push(value);
+  }
+  return values;
+}
+
+const startsLevel = ({ box }: Segment, below: Segment): boolean =>
+  Math.abs(box[0] - below.box[0]) < 3 && below.box[1] - box[3] < 0.9 * heightOf(below.box);
+
+const closeBy = ({ box }: Segment, next: Segment): boolean => next.box[0] - box[2] < 4 * heightOf(box);
+
+/** What follows on the line, up to the next label. */
+function toTheRight({ labelled, index, place }: Place): Segment[] {
+  const following: Segment[] = [];
+  for (const { segment, isLabel } of (labelled[index] ?? []).slice(place + 1)) {
+    if (isLabel) break;
+    if (/[\p{L}\p{N}]/u.test(segment.text)) following.push(segment);
+  }
+  return following;
+}
+
+/** What stands right under the label, in its column. */
+function belowIt({ segment, index, lines, labelled }: Place): Segment | null {
+  const height = heightOf(segment.box);
+  for (let next = index + 1; next < Math.min(lines.length, index + 4); next += 1) {
+    const line = lines[next];
+    if (!line || line.box[1] - segment.box[3] > 2.6 * Math.max(height, line.height * 0.8)) return null;
+    const under = (labelled[next] ?? []).filter(
+      (other) =>
+        sharedAcross(other.segment.box, segment.box) > 0 ||
+        Math.abs(other.segment.box[0] - segment.box[0]) < height,
+    );
+    const [found] = under.sort(
+      (a, b) => Math.abs(a.segment.box[0] - segment.box[0]) - Math.abs(b.segment.box[0] - segment.box[0]),
+    );
+    if (!found) continue;
+    const [first] = found.labels;
+    // The same in another language, under the label: look past it.
+    if (first?.whole && first.key === labelAtStart(segment.text)?.key) continue;
+    return found.isLabel ? null : found.segment;
+  }
+  return null;
+}
+
+/** The step that the nearest heading above speaks of. */
+function sectionOf(lines: readonly Line[], index: number, segment: Segment): Step | null {
+  for (let above = index; above >= 0; above -= 1) {
+    const line = lines[above];
+    if (!line) continue;
+    for (const other of line.segments) {
+      if (other === segment || !isHeading(other, line, above === index ? segment : null)) continue;
+      const beside = above !== index && sharedAcross(other.box, segment.box) <= 0 && line.segments.length > 1;
+      if (beside) continue;
+      const steps = stepsIn(other.text);
+      const [step] = steps;
+      if (step) return steps.length === 1 ? step.step : null;
+      if (line.segments.length === 1) return null;
+    }
+  }
+  return null;
+}
+
+/** A few words without figures that are no label of a value beside them. Left of the label on its own line also counts. */
+function isHeading(other: Segment, line: Line, onLineOf: Segment | null): boolean {
+  if (onLineOf && other.box[0] > onLineOf.box[0]) return false;
+  const text = other.text.trim().replace(/^(?:section |part )?(?:\d{1,2}|[A-Z])[.)\s]\s*/i, '');
+  if (/\d{2}/.test(text) || other.words.length > 7) return false;
+  const label = labelAtStart(text);
+  const steps = stepsIn(text);
+  if (steps.length > 0)
+    return (
+      label === null ||
+      label.key === 'process' ||
+      label.key === 'bake' ||
+      label.key === 'condition' ||
+      !label.marked
+    );
+  return label === null && line.segments.length === 1 && /^[\p{L}\s&/,.:()\-–]+$/u.test(text);
+}
+
+/** Lines that run on in the next one. A line runs on when it is a sentence's and reaches as far right as its neighbours. */
+function paragraphsOf(lines: readonly Line[]): Passage[] {
+  const paragraphs: Line[][] = [];
+  for (const line of lines) {
+    const open = paragraphs[paragraphs.length - 1];
+    const last = open?.[open.length - 1];
+    if (open && last && runsOn(last, line)) open.push(line);
+    else paragraphs.push([line]);
+  }
+  return paragraphs.map((part) => joined(part.flatMap(({ segments }) => segments)));
+}
+
+function runsOn(last: Line, line: Line): boolean {
+  const words = last.segments.reduce((sum, { words }) => sum + words.length, 0);
+  const close = line.box[1] - last.box[3] < 1.1 * Math.max(last.height, line.height);
+  const level = Math.abs(line.box[0] - last.box[0]) < 3 * last.height;
+  const wide = last.box[2] - last.box[0] > 22 * last.height || words > 8;
+  const prose = last.segments.length <= 2 && words >= 5;
+  const [first] = line.segments;
+  const label = first ? labelAtStart(first.text) : null;
+  return close && level && wide && prose && !(label?.marked ?? false);
+}

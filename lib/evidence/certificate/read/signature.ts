@@ -1,0 +1,145 @@
+import { heightOf, sharedAcross, sharedDown, widthOf } from '../../layout/box';
+import { spotIn, type Passage, type Spot } from '../../layout/passage';
+import type { Box, Mark } from '../../page';
+import { TRUST, type Answer } from './answers';
+import type { Candidate } from './candidates';
+import { labelAtStart } from './find-labels';
+import type { Paper } from './paper';
+import type { Sheet } from './sheet';
+
+export interface ReadSignature {
+  readonly present: boolean;
+  readonly spot: Spot | null;
+  readonly belief: number;
+}
+
+const SIGNED_IN_WORDS =
+  /(?:^|\s)\/\s?s\s?\/|(?:electronically|digitally|elektronisch|num[eé]riquement)\s+(?:signed|approved|authenticated|certified|unterzeichnet|unterschrieben|sign[eé]e?)|\be-?signed\b|(?:signed|approved|signature)\s+(?:electronically|digitally)|electronic signature\s*(?:of|by|:)\s*\p{L}/iu;
+const UNSIGNED =
+  /not\s+(?:electronically\s+)?signed|signature not required|valid without (?:a )?signature|ohne unterschrift g[uü]ltig/iu;
+
+/**
+ * Whether the certificate is signed: a stroke of a hand or a picture at the place for it, or words of an electronic
+ * signature. A printed name alone is none, an empty line neither.
+ */
+export function readSignature(paper: Paper): ReadSignature {
+  const inWords = paper.paragraphs.flatMap((paragraph) => wordsOfSignature(paragraph));
+  const [words] = inWords;
+  if (words) return { present: true, spot: words, belief: 0.95 };
+  const places = paper.answers.filter(({ key }) => key === 'signature');
+  const nearby =
+    places.length > 0
+      ? places
+      : paper.answers.filter(({ key }) => key === 'signer' || key === 'signer_title' || key === 'stamp');
+  for (const place of nearby) {
+    const mark = markAt(paper, place);
+    if (mark)
+      return {
+        present: true,
+        spot: spotOfMark(mark.sheet, mark.mark),
+        belief: places.length > 0 ? 0.93 : 0.8,
+      };
+  }
+  const loose = places.length === 0 ? looseStroke(paper) : null;
+  if (loose) return { present: true, spot: loose, belief: 0.7 };
+  const [place] = places;
+  return { present: false, spot: place?.label ?? null, belief: place ? 0.9 : 0.75 };
+}
+
+function wordsOfSignature(passage: Passage): Spot[] {
+  const match = SIGNED_IN_WORDS.exec(passage.text);
+  if (!match || UNSIGNED.test(passage.text)) return [];
+  const spot = spotIn(
+    passage,
+    match.index,
+    Math.min(passage.text.length, match.index + match[0].length + 24),
+  );
+  return spot ? [spot] : [];
+}
+
+function markAt(paper: Paper, { label, page }: Answer): { sheet: Sheet; mark: Mark } | null {
+  const sheet = paper.sheets.find((one) => one.page === page);
+  if (!sheet || !label) return null;
+  const [left, top, right, bottom] = label.box;
+  const height = Math.max(8, heightOf(label.box));
+  // Above the label's line, on it, or beside it.
+  const room: Box = [left - 3 * height, top - 6.5 * height, right + 26 * height, bottom + 3.5 * height];
+  const mark = sheet.marks.find(({ kind, box }) => {
+    const inside =
+      sharedAcross(box, room) > 0.4 * widthOf(box) && sharedDown(box, room) > 0.4 * heightOf(box);
+    return inside && (kind === 'stroke' || (kind === 'picture' && isSmall(box, sheet)));
+  });
+  return mark ? { sheet, mark } : null;
+}
+
+/** A picture of a signature or a stamp, not of the page. */
+const isSmall = (box: Box, { width, height }: Sheet): boolean =>
+  widthOf(box) < 0.5 * width && heightOf(box) < 0.2 * height;
+
+/** Where nothing asks for a signature, a hand's stroke in the lower part of the last pages is one. */
+function looseStroke(paper: Paper): Spot | null {
+  for (const sheet of paper.sheets) {
+    const mark = sheet.marks.find(
+      ({ kind, box }) =>
+        kind === 'stroke' && box[1] > 0.4 * sheet.height && widthOf(box) > 25 && heightOf(box) > 6,
+    );
+    if (mark) return spotOfMark(sheet, mark);
+  }
+  return null;
+}
+
+const spotOfMark = ({ page }: Sheet, { box }: Mark): Spot => ({ raw: '', page, box, legible: 1 });
+
+const NAME =
+  /^(?:(?:mr|ms|mrs|dr|dipl\.?-?ing|herr|frau)\.?\s+)?\p{Lu}[\p{L}'’-]*\.?(?:\s+(?:\p{Lu}[\p{L}'’-]*\.?|de|van|von|der|la|le|del)){1,3}(?=$|[,;(/|–]|\s+-)/u;
+const TITLE =
+  /\b(?:manager|inspector|engineer|director|supervisor|technician|coordinator|representative|lead|officer|president|quality\s+\w+|qa|qc|leiter\w*|pr[uü]fer|responsable|jefe)\b/iu;
+
+/** The name of who signed. */
+export function signers(paper: Paper): Candidate<string>[] {
+  const weight = { signer: 0.95, signature: 0.85 } as const;
+  const asked = paper.answers.flatMap((answer): Candidate<string>[] => {
+    if (answer.key !== 'signer' && answer.key !== 'signature') return [];
+    for (const { passage, how } of answer.values) {
+      const text = passage.text.replace(/^[\s:_]*(?:\/\s?s\s?\/)?\s*/, '');
+      const at = passage.text.length - text.length;
+      const match = NAME.exec(text);
+      const spot = match && spotIn(passage, at, at + match[0].length);
+      if (!match || !spot || labelAtStart(match[0]) || TITLE.test(match[0])) continue;
+      return [{ value: match[0].trim(), spot, trust: TRUST[how] * weight[answer.key] }];
+    }
+    return [];
+  });
+  const said = paper.paragraphs.flatMap((paragraph): Candidate<string>[] => {
+    const match = /(?:\/\s?s\s?\/|signed by|approved by|certified by)\s*:?\s*/iu.exec(paragraph.text);
+    if (!match) return [];
+    const at = match.index + match[0].length;
+    const name = NAME.exec(paragraph.text.slice(at).split(/\s(?=\d|on\b|at\b)/)[0] ?? '');
+    const spot = name && spotIn(paragraph, at, at + name[0].length);
+    return name && spot ? [{ value: name[0].trim(), spot, trust: 0.85 }] : [];
+  });
+  return [...asked, ...said];
+}
+
+/** The title of who signed. */
+export function signerTitles(paper: Paper): Candidate<string>[] {
+  const asked = paper.answers.flatMap((answer): Candidate<string>[] => {
+    if (answer.key !== 'signer_title') return [];
+    for (const { passage, how } of answer.values) {
+      const value = passage.text.replace(/^[\s:_]+|[\s_]+$/g, '');
+      const spot = spotIn(passage, 0, passage.text.length);
+      if (spot && /\p{L}{2}/u.test(value) && value.length < 50) return [{ value, spot, trust: TRUST[how] }];
+    }
+    return [];
+  });
+  const beside = paper.answers.flatMap((answer): Candidate<string>[] => {
+    if (answer.key !== 'signer' && answer.key !== 'signature') return [];
+    return answer.values.flatMap(({ passage }): Candidate<string>[] => {
+      const match = /[,;(/|–]\s*([\p{L}\s./&-]{3,40})\)?\s*$/u.exec(passage.text);
+      const spot = match && spotIn(passage, match.index, passage.text.length);
+      const value = match?.[1]?.trim();
+      return value && spot && TITLE.test(value) ? [{ value, spot, trust: 0.8 }] : [];
+    });
+  });
+  return [...asked, ...beside];
+}

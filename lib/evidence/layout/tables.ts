@@ -1,0 +1,202 @@
+import type { Box } from '../page';
+import { boxAround, centreOf, heightOf, sharedAcross, widthOf } from './box';
+import type { Line, Segment } from './lines';
+import { joined, passageOf, type Passage, type PlacedWord } from './passage';
+
+/** Cells of the rows under a heading, by the place of their column in it. */
+export interface Table<Heading> {
+  readonly page: number;
+  readonly columns: readonly Column<Heading>[];
+  readonly rows: readonly Row[];
+  /** The first line of the heading and the first line that no longer belongs to the table, among the page's lines. */
+  readonly from: number;
+  readonly to: number;
+}
+
+export interface Column<Heading> {
+  readonly text: string;
+  readonly box: Box;
+  /** What the heading asks for; null for words that say nothing to us. */
+  readonly heading: Heading | null;
+}
+
+export interface Row {
+  readonly cells: readonly (Passage | null)[];
+  readonly box: Box;
+}
+
+export interface HeadingReader<Heading> {
+  /** What the words of a whole cell ask for, null where they are no heading. */
+  readonly read: (text: string) => Heading | null;
+  /** Whether a line of the page can be no row of a table: it begins with a label and its colon. */
+  readonly endsTable: (segment: Segment) => boolean;
+  /** The column whose cells begin a row; a line without it continues the row above. */
+  readonly anchors: (heading: Heading) => boolean;
+}
+
+/**
+ * The tables of a page: rows under a line, or up to three lines one above the other, most of whose cells are headings.
+ */
+export function tablesOf<Heading>(lines: readonly Line[], reader: HeadingReader<Heading>): Table<Heading>[] {
+  const tables: Table<Heading>[] = [];
+  let at = 0;
+  while (at < lines.length) {
+    const heading = headingAt(lines, at, reader);
+    const table = heading && tableUnder(lines, at, heading, reader);
+    if (table) tables.push(table);
+    at = table ? Math.max(at + 1, table.to) : at + 1;
+  }
+  return tables;
+}
+
+interface FoundHeading<Heading> {
+  readonly columns: readonly Column<Heading>[];
+  readonly height: number;
+}
+
+function headingAt<Heading>(
+  lines: readonly Line[],
+  at: number,
+  reader: HeadingReader<Heading>,
+): FoundHeading<Heading> | null {
+  let best: (FoundHeading<Heading> & { known: number }) | null = null;
+  for (let height = 1; height <= 3 && at + height <= lines.length; height += 1) {
+    const used = lines.slice(at, at + height);
+    const [last, before] = [used[height - 1], used[height - 2]];
+    if (!last || (before && last.box[1] - before.box[3] > 0.9 * last.height)) break;
+    if (last.segments.some(({ text }) => /\d.*\d/.test(text.replace(/\([^)]*\)/g, '')) || text.length > 60))
+      break;
+    const columns = columnsOf(used).map((column) => ({ ...column, heading: reader.read(column.text) }));
+    const known = columns.filter(({ heading }) => heading !== null).length;
+    if (known < 2 || known < 0.6 * columns.length) continue;
+    if (!best || known > best.known) best = { columns, height, known };
+  }
+  return best;
+}
+
+/** Segments that stand above one another are one cell of the heading. */
+function columnsOf(lines: readonly Line[]): { text: string; box: Box }[] {
+  const cells: { parts: Segment[]; box: Box }[] = [];
+  for (const segment of lines.flatMap(({ segments }) => segments)) {
+    const cell = cells.find(({ box }) => sharedAcross(box, segment.box) > 0);
+    if (cell) {
+      cell.parts.push(segment);
+      cell.box = boxAround([cell.box, segment.box]);
+    } else cells.push({ parts: [segment], box: segment.box });
+  }
+  return cells
+    .sort((a, b) => a.box[0] - b.box[0])
+    .map(({ parts, box }) => ({ text: parts.map(({ text }) => text).join(' '), box }));
+}
+
+function tableUnder<Heading>(
+  lines: readonly Line[],
+  at: number,
+  { columns, height }: FoundHeading<Heading>,
+  reader: HeadingReader<Heading>,
+): Table<Heading> | null {
+  const anchor = Math.max(
+    0,
+    columns.findIndex(({ heading }) => heading !== null && reader.anchors(heading)),
+  );
+  const rows: { cells: Passage[][]; box: Box; filled: number }[] = [];
+  let to = at + height;
+  for (; to < lines.length; to += 1) {
+    const [line, above] = [lines[to], lines[to - 1]];
+    if (
+      !line ||
+      !above ||
+      tooFar(line, above, rows.length > 1 ? rows : []) ||
+      endsAt(lines, to, columns, reader)
+    )
+      break;
+    const cells = cellsOf(line, columns);
+    const last = rows[rows.length - 1];
+    const begins = !last || (cells[anchor]?.length ?? 0) > 0 || line.box[1] - last.box[3] > 1.2 * line.height;
+    if (!begins) {
+      cells.forEach((cell, index) => last.cells[index]?.push(...cell));
+      last.box = boxAround([last.box, line.box]);
+    } else rows.push({ cells, box: line.box, filled: cells.filter(({ length }) => length > 0).length });
+  }
+  if (rows.length === 0) return null;
+  return {
+    page: lines[at]?.page ?? 1,
+    columns,
+    from: at,
+    to,
+    rows: rows.map(({ cells, box }) => ({
+      box,
+      cells: cells.map((cell) => (cell.length === 0 ? null : joined(cell))),
+    })),
+  };
+}
+
+/** Further below the line above than rows of this table are from one another. */
+function tooFar(line: Line, above: Line, rows: readonly { readonly box: Box }[]): boolean {
+  const gap = line.box[1] - above.box[3];
+  const [first, second] = rows;
+  const usual = first && second ? second.box[1] - first.box[3] : 0;
+  return gap > Math.max(2.6 * Math.min(line.height, above.height), 1.7 * usual);
+}
+
+function endsAt<Heading>(
+  lines: readonly Line[],
+  at: number,
+  columns: readonly Column<Heading>[],
+  reader: HeadingReader<Heading>,
+): boolean {
+  const line = lines[at];
+  if (!line) return true;
+  if (line.segments.some((segment) => reader.endsTable(segment))) return true;
+  if (headingAt(lines, at, reader) !== null) return true;
+  const [only] = line.segments;
+  // A sentence under the table, which runs through its columns.
+  const crossed = only
+    ? columns.filter(({ box }) => centreOf(box) > only.box[0] && centreOf(box) < only.box[2])
+    : [];
+  return line.segments.length === 1 && crossed.length > 1 && (only?.words.length ?? 0) > 4;
+}
+
+/** The words of a line, each in the column it stands under. */
+function cellsOf(line: Line, columns: readonly Column<unknown>[]): Passage[][] {
+  const cells = columns.map((): Passage[] => []);
+  for (const segment of line.segments) {
+    const under = columns.filter(({ box }) => sharedAcross(box, segment.box) > 0.35 * widthOf(box));
+    if (under.length <= 1) cells[columnOf(segment.box, columns)]?.push(segment);
+    else for (const part of wordsByColumn(segment, columns)) cells[part.column]?.push(passageOf(part.words));
+  }
+  return cells;
+}
+
+function wordsByColumn(
+  segment: Segment,
+  columns: readonly Column<unknown>[],
+): { column: number; words: PlacedWord[] }[] {
+  const parts: { column: number; words: PlacedWord[] }[] = [];
+  for (const word of segment.words) {
+    const column = columnOf(word.box, columns);
+    const last = parts[parts.length - 1];
+    if (last?.column === column) last.words.push(word);
+    else parts.push({ column, words: [word] });
+  }
+  return parts;
+}
+
+/** The column under whose heading a box stands, or whose heading it is nearest to at either edge or in the middle. */
+function columnOf(box: Box, columns: readonly Column<unknown>[]): number {
+  let best = { index: 0, far: Infinity };
+  columns.forEach((column, index) => {
+    const shared = sharedAcross(column.box, box);
+    const far =
+      shared > 0
+        ? -shared / Math.min(widthOf(column.box), widthOf(box))
+        : Math.min(
+            Math.abs(column.box[0] - box[0]),
+            Math.abs(column.box[2] - box[2]),
+            Math.abs(centreOf(column.box) - centreOf(box)),
+          ) +
+          heightOf(box) * 0.01;
+    if (far < best.far) best = { index, far };
+  });
+  return best.index;
+}

@@ -1,0 +1,90 @@
+import type { Grey, Ink } from './grey';
+import { findComponents } from './find-components';
+import { findInk, inkThreshold } from './find-ink';
+import { findLie } from './find-skew';
+import { guessUpsideDown } from './guess-upside-down';
+import {
+  chainProjections,
+  inverseOf,
+  quarterTurn,
+  rotationAbout,
+  SAME_PLACE,
+  type Projection,
+} from './projection';
+import { shrink } from './shrink';
+import { warp } from './warp';
+
+export interface Straightened {
+  readonly picture: Grey;
+  /** Degrees clockwise the picture was turned by, beside the small turn that levels its lines. */
+  readonly turned: 0 | 90 | 180 | 270;
+  /** From a place in the picture that was given to its place in the straightened one. */
+  readonly projection: Projection;
+}
+
+/** Fine enough to see lines of text apart. */
+const DPI_TO_LOOK = 90;
+const STRAIGHT_ENOUGH = 0.08;
+
+/** Turns a levelled page so that its lines of text run level, and, as far as can be told, upright. */
+export function straighten(picture: Grey, dpi: number): Straightened {
+  const factor = Math.max(1, Math.round(dpi / DPI_TO_LOOK));
+  const small = shrink(picture, factor);
+  const ink = withoutLongRuns(findInk(small, Math.max(140, inkThreshold(small))), (dpi / factor) * 0.45);
+  const lie = findLie(ink);
+  const quarter = lie.sideways ? 90 : 0;
+  const skew = Math.abs(lie.skew) < STRAIGHT_ENOUGH ? 0 : lie.skew;
+  const level = turnBy(picture, quarter, skew);
+  const upsideDown = guessUpsideDown(
+    findComponents(findInk(level.picture, inkThreshold(level.picture))),
+    dpi,
+  );
+  return upsideDown ? overturn(level) : level;
+}
+
+/** The same page standing on its head. */
+export function overturn({ picture, turned, projection }: Straightened): Straightened {
+  const { width, height } = picture;
+  return {
+    picture: { width, height, data: picture.data.slice().reverse() },
+    turned: ((turned + 180) % 360) as Straightened['turned'],
+    projection: chainProjections(projection, quarterTurn(180, width, height)),
+  };
+}
+
+function turnBy(picture: Grey, quarter: 0 | 90, skew: number): Straightened {
+  if (quarter === 0 && skew === 0) return { picture, turned: 0, projection: SAME_PLACE };
+  const turn = quarterTurn(quarter, picture.width, picture.height);
+  const [width, height] = quarter === 90 ? [picture.height, picture.width] : [picture.width, picture.height];
+  const level = rotationAbout((-skew * Math.PI) / 180, width / 2, height / 2);
+  const projection = chainProjections(turn, level);
+  return { picture: warp(picture, inverseOf(projection), { width, height }), turned: quarter, projection };
+}
+
+/** Rules would outweigh the text, and those of a plot may lean. Runs along rows and columns longer than `longest` go. */
+function withoutLongRuns(ink: Ink, longest: number): Ink {
+  const { width, height, data } = ink;
+  const out = data.slice();
+  const drop = (start: number, count: number, step: number) => {
+    for (let i = 0, at = start; i < count; i++, at += step) out[at] = 0;
+  };
+  for (let y = 0; y < height; y++) {
+    for (let x = 0, run = 0; x <= width; x++) {
+      if (x < width && data[y * width + x] === 1) run++;
+      else {
+        if (run > longest) drop(y * width + x - run, run, 1);
+        run = 0;
+      }
+    }
+  }
+  for (let x = 0; x < width; x++) {
+    for (let y = 0, run = 0; y <= height; y++) {
+      if (y < height && data[y * width + x] === 1) run++;
+      else {
+        if (run > longest) drop((y - run) * width + x, run, width);
+        run = 0;
+      }
+    }
+  }
+  return { width, height, data: out };
+}
