@@ -19,6 +19,7 @@ import * as batchLinks from '@/lib/portal/link-endpoints';
 import * as processors from '@/lib/processors/endpoints';
 import * as readings from '@/lib/readings/endpoints';
 import * as receipts from '@/lib/receipts/endpoints';
+import * as requirements from '@/lib/requirements/endpoints';
 import * as search from '@/lib/search/endpoints';
 import * as session from '@/lib/session/endpoints';
 import * as stock from '@/lib/stock/endpoints';
@@ -49,6 +50,7 @@ export const ALL_ENDPOINTS: readonly Endpoint[] = [
   processors,
   readings,
   receipts,
+  requirements,
   search,
   session,
   stock,

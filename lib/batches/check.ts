@@ -1,5 +1,7 @@
 import type { CalendarDay, Clock } from '@/lib/day-words';
+import type { PartSizes } from '@/lib/parts/computed-mass';
 import type { TypedMaterial } from '@/lib/parts/material-of';
+import type { OrderingAnswers } from '@/lib/parts/ordering-answers';
 import type { BatchTables } from '@/lib/reference/batch-tables';
 import type { Process } from '@/lib/trade/process';
 
@@ -31,14 +33,17 @@ export interface CheckedStep extends StepAsked {
   id: string;
   conditionBefore: string | null;
   targetCondition: string | null;
+  /** What the order states for it beside these. */
+  ordering: OrderingAnswers;
 }
 
 /** What the rules of the trade ask of a part; measures in mm and g, null where the part does not say. */
-export interface CheckedPart extends TypedMaterial {
+export interface CheckedPart extends TypedMaterial, PartSizes {
   id: string;
   madeCondition: string;
   endCondition: string;
-  thicknessMm: number | null;
+  massG: number | null;
+  areaMm2: number | null;
   /** As typed: `0.040 in`. */
   thickness: string | null;
   /** Its outside steps in order. */
@@ -51,6 +56,7 @@ export interface CheckedLine {
   lotNumber: string;
   partNumber: string;
   partRevision: string;
+  partName: string;
   partSuperseded: boolean;
   part: CheckedPart;
   stepId: string;

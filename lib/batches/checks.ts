@@ -3,6 +3,7 @@ import { hasReheatsLeft } from './clad-checks';
 import { canBeMade } from './condition-checks';
 import { CHECK_LEVELS, type Finding } from './finding';
 import { hasLines, isCurrent, isOneStep, isProvable } from './line-checks';
+import { statesWhatIsAsked } from './ordering-checks';
 import { hasDay, hasPrice, isTakenUp } from './order-checks';
 import { sharesLoads } from './load-checks';
 import { isApproved, isApprovedUntilBack, worksForUs } from './processor-checks';
@@ -22,6 +23,7 @@ const CHECKS: readonly Check[] = [
   isApprovedUntilBack,
   isInForce,
   meansWhatItSays,
+  statesWhatIsAsked,
   isProvable,
   isCurrent,
   hasDay,

@@ -77,6 +77,7 @@ async function readLines(ctx: Ctx, batchId: string): Promise<CheckedLine[]> {
       partId: lots.partId,
       partNumber: parts.number,
       partRevision: parts.revision,
+      partName: parts.name,
       supersededAt: parts.supersededAt,
       characteristics: sql<
         string[]
