@@ -248,6 +248,7 @@ const PLANTED: Record<string, Case[]> = {
   conductivity_out_of_range: [
     ['in % IACS', HEAT, { readings: [reading('conductivity', '%IACS', 33)] }],
     ['in MS/m', HEAT, { readings: [reading('conductivity', 'MS/m', 19.1)] }],
+    ['ten times too much, in print', HEAT, { readings: [reading('conductivity', '% IACS', 30.1, 325)] }],
     ['without a unit', HEAT, { readings: [reading('conductivity', null, 40)] }],
   ],
   readings_impossible_together: [
@@ -436,6 +437,12 @@ const RIGHT: Case[] = [
     'two scales of hardness',
     HEAT,
     { readings: [reading('hardness', 'HRB', 70), reading('hardness', 'HB', 110)] },
+  ],
+  [
+    'a reading whose point was not recognised',
+    HEAT,
+    { readings: [reading('conductivity', '% IACS', 30.1, 325), reading('hardness', 'HRB', 70.5, 71, 690)] },
+    { file: { ...FILE, recognised: true } },
   ],
   ['micrometres', PLATE, { readings: [reading('thickness', 'µm', 7.62, 12.7)] }],
   ['micrometres at their rounded end', PLATE, { readings: [reading('thickness', 'microns', 7.6)] }],
