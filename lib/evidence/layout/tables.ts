@@ -69,10 +69,16 @@ function headingAt<Heading>(
     const columns = columnsOf(used).map((column) => ({ ...column, heading: reader.read(column.text) }));
     const known = columns.filter(({ heading }) => heading !== null).length;
     if (known < 2 || known < 0.6 * columns.length) continue;
-    if (!best || known > best.known) best = { columns, height, known };
+    // A second line that is a part of headings leaves them headings; a row of values would not.
+    const isPart =
+      last.segments.length < columns.length && last.segments.every((segment) => isUnderHeading(segment, columns));
+    if (!best || known > best.known || (known === best.known && isPart)) best = { columns, height, known };
   }
   return best;
 }
+
+const isUnderHeading = ({ box }: Segment, columns: readonly Column<unknown>[]): boolean =>
+  columns.some((column) => column.heading !== null && sharedAcross(column.box, box) > 0);
 
 /** Segments that stand above one another are one cell of the heading. */
 function columnsOf(lines: readonly Line[]): { text: string; box: Box }[] {
@@ -149,7 +155,9 @@ function endsAt<Heading>(
   if (!line) return true;
   if (line.segments.some((segment) => reader.endsTable(segment))) return true;
   if (headingAt(lines, at, reader) !== null) return true;
-  const [only] = line.segments;
+  const [only, second, third] = line.segments;
+  // A label with its value under a table of more columns is a field of its own.
+  if (only && second && !third && columns.length >= 4 && reader.read(only.text) !== null) return true;
   // A sentence under the table, which runs through its columns.
   const crossed = only
     ? columns.filter(({ box }) => centreOf(box) > only.box[0] && centreOf(box) < only.box[2])

@@ -5,7 +5,7 @@ import { wordsIn } from './codes';
 import type { Paper } from './paper';
 
 const ROMAN = String.raw`(?:[IVXl1|]{1,4}[A-C]?|\d{1,2}[A-C]?|[A-D])(?![\p{L}\d])`;
-const KIND = String.raw`(?:type|class|method|grade|form|ty\.|cl\.|sensitivity(?:\s+level)?|level|typ|klasse|classe|tipo|clase|m[eé]thode|methode)`;
+const KIND = String.raw`(?:type|SC|class|method|grade|form|ty\.|cl\.|sensitivity(?:\s+level)?|level|typ|klasse|classe|tipo|clase|m[eé]thode|methode)`;
 const DESIGNATION = new RegExp(
   String.raw`(?<![\p{L}])${KIND}\.?\s*:?\s*${ROMAN}(?:\s*(?:[,;/&]|and|-)?\s*${KIND}\.?\s*:?\s*${ROMAN})*`,
   'giu',
@@ -79,7 +79,7 @@ function joinedUp(answers: readonly Answer[]): Candidate<string>[] {
       /^(?:type|class|grade|typ|klasse|classe|tipo|clase)$/.test(name) &&
       new RegExp(`^${ROMAN}$`, 'iu').test(words.value);
     const text = single ? `${english(name)} ${roman(words.value)}` : (said ?? words.value);
-    if (!single && !said && !/\d/.test(text)) continue;
+    if (!single && !said && !/\d/.test(text) && !/^[\p{L}\s,/-]{5,40}$/u.test(text)) continue;
     if (!parts.some((part) => part.text === text)) parts.push({ name, text, spot: words.spot, trust });
   }
   const [first] = parts;

@@ -1,6 +1,6 @@
 import { spotIn, type Passage, type Spot } from '../../layout/passage';
 import type { LabelKey } from './labels';
-import { momentsIn, type FoundMoment } from './moments';
+import { momentsIn, timesIn, type FoundMoment } from './moments';
 import { durationsIn, numberFrom, temperaturesIn, type DecimalSign, type FoundQuantity } from './quantities';
 
 /** What a piece of text says about a cycle. */
@@ -112,7 +112,10 @@ function durationOf(
   qualifier: string,
 ): CycleAttributes['minutes'] | null {
   const { text } = passage;
-  const found = durationsIn(text, sign).filter((one) => !isOther(text, one));
+  const clocks = timesIn(text);
+  const found = durationsIn(text, sign).filter(
+    (one) => !isOther(text, one) && !clocks.some(({ start, end }) => start < one.end && end > one.start),
+  );
   const best = found.find((one) => !isLimit(text, one)) ?? (asked === null ? undefined : found[0]);
   const spot = best && spotIn(passage, best.start, best.end);
   if (best && spot) return { value: best.value, spot };

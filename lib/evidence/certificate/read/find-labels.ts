@@ -114,6 +114,8 @@ function labelAt(text: string, plain: string, at: number, first: boolean): Found
   const stepped = bare && /\s/.test(plain.slice(at, bare.end)) ? null : steppedAt(text, plain, at);
   const best = stepped ?? (bare ? { ...bare, step: null } : null);
   if (!best) return null;
+  // "PO-5001" is a number and no question for one.
+  if (/^-?\d|^[-/][\p{L}\d]/u.test(text.slice(best.end)) && !text.slice(at, best.end).endsWith('#')) return null;
   const tail = tailOf(text, plain, best.end, best.phrase.key);
   if (best.phrase.needsColon && !/[:]/.test(text.slice(best.end, tail.end))) return null;
   const standsOut =
@@ -201,7 +203,7 @@ function tailOf(text: string, plain: string, from: number, key: LabelKey): Tail 
     const within = inBrackets === undefined ? null : phraseAt(plain, end + text.slice(end).indexOf('(') + 1);
     // A value in brackets with digits in it is a value: "(12 pcs)".
     if (inBrackets !== undefined && /\d{2}/.test(inBrackets) && !/hr|hv|hb|mm/i.test(inBrackets)) break;
-    if (!within) qualifier = `${qualifier} ${words}`.trim();
+    if (!within || /^(?:hr|hv|hb|%|iacs|min|h$|hrs)/i.test(words)) qualifier = `${qualifier} ${words}`.trim();
     end += whole.length;
   }
   const mark = MARK.exec(text.slice(end));

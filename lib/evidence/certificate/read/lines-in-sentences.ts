@@ -10,16 +10,16 @@ const PART =
   /\b(?:p\/?n\.?|part\s*(?:numbers?|no\.?|nos\.?|#)|parts?|drawing|dwg\.?|teile?-?(?:nr\.?|nummer)|r[eé]f(?:[eé]rence)?\.?)\s*:?\s*(?=[A-Z0-9./-]*\d)/giu;
 const COUNTS = {
   accepted: [
-    /(\d[\d,]*)\s*(?:\(\w+\)\s*)?(?:pcs?\.?|pieces?|parts?|ea\.?|units?)?\s*(?:were\s+|was\s+|are\s+|have been\s+)?(?:found\s+)?(?:accepted|acceptable|conforming|passed|good|acc\.|angenommen|accept[eé]es?|aceptadas?)/iu,
+    /(?<![\p{L}\d.,/-])(\d{1,3}(?:,\d{3})+|\d+)\s*(?:\(\w+\)\s*)?(?:pcs?\.?|pieces?|parts?|ea\.?|units?)?\s*(?:were\s+|was\s+|are\s+|have been\s+)?(?:found\s+)?(?:accepted|acceptable|conforming|passed|good|acc\.|angenommen|accept[eé]es?|aceptadas?)/iu,
     /\b(?:accepted|acc|passed)\s*[:=]?\s*(\d[\d,]*)/iu,
   ],
   rejected: [
-    /(\d[\d,]*|none|no|zero|nil)\s*(?:\(\w+\)\s*)?(?:pcs?\.?|pieces?|parts?|ea\.?|units?)?\s*(?:were\s+|was\s+|are\s+|have been\s+)?(?:rejected|rej\.|scrapped|rejects?\b|nonconforming|abgelehnt|rebut[eé]es?|rechazadas?)/iu,
+    /(?<![\p{L}\d.,/-])(\d{1,3}(?:,\d{3})+|\d+|none|no|zero|nil)\s*(?:\(\w+\)\s*)?(?:pcs?\.?|pieces?|parts?|ea\.?|units?)?\s*(?:were\s+|was\s+|are\s+|have been\s+)?(?:rejected|rej\.|scrapped|rejects?\b|nonconforming|abgelehnt|rebut[eé]es?|rechazadas?)/iu,
     /\b(?:rejected|rejects|rej)\s*[:=]?\s*(\d[\d,]*|none|nil)/iu,
   ],
   quantity: [
     /\b(?:qty|quantity|menge|quantit[eé]|cantidad)\.?\s*(?:of\s+)?[:=]?\s*(\d[\d,]*)/iu,
-    /(?<![\d.,/-])(\d[\d,]*)\s*(?:\(\w+\)\s*)?(?:pcs?\b\.?|pieces?\b|ea\b\.?|each\b|units?\b|parts?\b|st(?:ü|u)ck\b|pi[eè]ces\b|piezas\b)/iu,
+    /(?<![\p{L}\d.,/-])(\d{1,3}(?:,\d{3})+|\d+)\s*(?:\(\w+\)\s*)?(?:pcs?\b\.?|pieces?\b|ea\b\.?|each\b|units?\b|parts?\b|st(?:ü|u)ck\b|pi[eè]ces\b|piezas\b)/iu,
   ],
 } as const;
 
@@ -53,7 +53,7 @@ function linesIn(passage: Passage, paper: Paper): ReadLine[] {
     if (lot) line.lot = { ...lot, trust };
     const material = said(
       around,
-      /\b(?:material|matl\.?|made (?:of|from)|werkstoff|mati[eè]re)\s*:?\s*((?:alclad\s+|al\s+)?[A-Z0-9][\w./-]*(?:\s+(?:sheet|plate|bar|tube|steel|alloy|aluminum|aluminium|clad|rod|forging|casting|extrusion|0?\.\d+))*)/iu,
+      /\b(?:material|matl\.?|made (?:of|from)|werkstoff|mati[eè]re)\s*:?\s*([A-Z0-9][^,;:()]{2,40}?)(?=\s*(?:[,;:()]|\.\s|\.?$|\blot\b|\bqty\b|\bheat\b|\d+\s*pcs))/iu,
     );
     if (material && /\d/.test(material.value)) line.material = { ...material, trust: 0.7 };
     return [line];

@@ -90,9 +90,13 @@ export function readLines(paper: Paper): ReadLine[] {
     fromTables.lines.length > 0,
   );
   const lines = fromTables.lines.length > 0 ? fromTables.lines : inForms.lines;
-  const found = lines.length > 0 ? lines : linesInSentences(paper);
+  const told = linesInSentences(paper);
+  const found = lines.length > 0 ? lines : told;
   completeFrom(found, inForms.shared);
-  if (found.length === 1 && lines.length > 0) completeFrom(found, linesInSentences(paper)[0] ?? {});
+  for (const line of found) {
+    const same = told.find(({ part }) => part?.value === line.part?.value);
+    if (same && same !== line) completeFrom([line], same);
+  }
   return withoutRepeats(found);
 }
 

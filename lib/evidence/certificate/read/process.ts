@@ -2,6 +2,7 @@ import type { Process } from '../../../trade/process';
 import { spotIn, type Passage } from '../../layout/passage';
 import type { Candidate } from './candidates';
 import type { Paper } from './paper';
+import { LEGAL } from './processor';
 import { SAID_AS } from './process-signs';
 import type { SpecificationRead } from './specification';
 
@@ -18,16 +19,19 @@ export function processesOf(
     found.push({
       value: specification.value.process,
       spot: specification.spot,
-      trust: 0.93 * specification.trust,
+      trust: 0.93 * (0.6 + 0.4 * specification.trust),
     });
   for (const { key, values } of paper.answers)
     if (key === 'process' || key === 'test' || key === 'method')
       for (const { passage } of values.slice(0, 1))
         found.push(...saidIn(passage, key === 'process' ? 0.85 : 0.6));
   for (const paragraph of paper.paragraphs)
-    found.push(...saidIn(paragraph, isTitle(paragraph.text) ? 0.8 : 0.45));
+    if (!isFirm(paragraph.text)) found.push(...saidIn(paragraph, isTitle(paragraph.text) ? 0.8 : 0.45));
   return found;
 }
+
+/** What a firm is called is not what it did. */
+const isFirm = (text: string): boolean => LEGAL.test(text) && text.length < 90;
 
 const isTitle = (text: string): boolean => text.length < 70 && !/[.;]\s|:/.test(text);
 

@@ -10,7 +10,7 @@ import type { Paper } from './paper';
 import type { Sheet } from './sheet';
 
 /** How a firm is written. */
-const LEGAL =
+export const LEGAL =
   /(?:^|[\s,])(?:inc|incorporated|llc|l\.l\.c|ltd|limited|corp|corporation|co|company|gmbh|ag|kg|sa|s\.a|sas|sarl|s\.a\.s|srl|s\.r\.l|spa|s\.p\.a|bv|b\.v|nv|oy|ab|aps|plc|lp|llp|pty|s\.l)\.?(?=$|[\s,)•|·–-])/iu;
 /** What firms that do such work have in their names. */
 const TRADE =

@@ -32,7 +32,9 @@ export function numberFrom(written: string, sign: DecimalSign): number {
 export function decimalSignOf(text: string): DecimalSign {
   const commas = text.match(/(?<![\d,.])\d{1,4},\d{1,2}(?![\d,])/g)?.length ?? 0;
   const points = text.match(/(?<![\d,./])\d{1,4}\.\d{1,2}(?![\d,.])/g)?.length ?? 0;
-  return commas > points ? ',' : '.';
+  // Who parts the day by full stops has a comma before decimals.
+  const dotted = /(?<!\d)\d{1,2}\.\d{1,2}\.(?:20)?\d{2}(?!\d)/.test(text);
+  return commas > points || (dotted && commas > 0) ? ',' : '.';
 }
 
 export interface FoundQuantity {

@@ -43,7 +43,7 @@ export function sheetOf(page: Page): Sheet {
     read: headingOf,
     endsTable: ({ text }) => {
       const label = labelAtStart(text);
-      return label !== null && label.marked && !label.whole && /:/.test(text.slice(0, label.end));
+      return label !== null && label.marked && /:/.test(text.slice(0, label.end));
     },
     anchors: ({ key }) => key === 'part_number',
   });
@@ -244,5 +244,6 @@ function runsOn(last: Line, line: Line): boolean {
   const prose = last.segments.length <= 2 && words >= 5;
   const [first] = line.segments;
   const label = first ? labelAtStart(first.text) : null;
-  return close && level && wide && prose && !(label?.marked ?? false);
+  const listed = /^\s*(?:[-–•*·]|\d{1,2}[.)])\s/.test(first?.text ?? '');
+  return close && level && wide && prose && !listed && !(label?.marked ?? false);
 }
