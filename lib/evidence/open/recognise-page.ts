@@ -5,23 +5,28 @@ import { findStrokes } from './picture/find-strokes';
 import type { PixelBox } from './picture/grey';
 import { chainProjections, inverseOf, quarterTurn, scaling } from './picture/projection';
 import { lookAgain } from './picture/second-look';
-import { overturn } from './picture/straighten';
-import { prepareAgain, type Prepared } from './prepare-page';
+import { turnPrepared, type Prepared } from './prepare-page';
 import type { RecognisedWord, Recogniser } from './recogniser';
 import { READING_DPI, resize } from './resize';
 
 /** Words of a page that stands on its head are rubbish, and the recogniser knows. */
 const RUBBISH = 0.6;
+const FEWEST_LETTERS = 20;
 /** A word this doubtful under a stroke is the stroke misread. */
 const DOUBTFUL = 0.7;
 
-/** Recognises a prepared page; turns it over and tries again where nothing sensible comes out. */
+/** Recognises a prepared page; turns it and tries again where nothing sensible comes out. */
 export async function recognisePage(prepared: Prepared, recogniser: Recogniser): Promise<Page> {
-  const first = await read(prepared, recogniser);
-  if (meanConfidence(first) >= RUBBISH || prepared.components.length < 20) return assemble(prepared, first);
-  const over = prepareAgain(prepared, overturn(prepared.straight));
-  const second = await read(over, recogniser);
-  return meanConfidence(second) > meanConfidence(first) ? assemble(over, second) : assemble(prepared, first);
+  let page = prepared;
+  let best = { page, words: await read(page, recogniser) };
+  if (prepared.components.length < FEWEST_LETTERS) return assemble(best.page, best.words);
+  for (const further of [180, 90, 180] as const) {
+    if (meanConfidence(best.words) >= RUBBISH) break;
+    page = turnPrepared(page, further);
+    const words = await read(page, recogniser);
+    if (meanConfidence(words) > meanConfidence(best.words)) best = { page, words };
+  }
+  return assemble(best.page, best.words);
 }
 
 async function read(page: Prepared, recogniser: Recogniser): Promise<RecognisedWord[]> {

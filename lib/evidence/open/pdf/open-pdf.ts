@@ -8,7 +8,7 @@ import { preparePage, type Prepared } from '../prepare-page';
 import { recognisePage } from '../recognise-page';
 import type { Recogniser } from '../recogniser';
 import { coarsen } from '../resize';
-import { refuseBrokenPdf } from './check-pdf';
+import { refuseHarmfulPdf } from './check-pdf';
 import { asUnreadable, openDocument } from './open-document';
 import { pictureOfPage, shareCovered } from './page-picture';
 import { readPage, type DescribedPage, type Layers } from './read-page';
@@ -32,7 +32,7 @@ export async function openPdf(
   bytes: Uint8Array,
   { password, limits, recogniser }: Tools & { password?: string | undefined },
 ): Promise<Opened> {
-  refuseBrokenPdf(bytes);
+  refuseHarmfulPdf(bytes, limits);
   const document = await openDocument(bytes, { password, limits });
   try {
     return await openPages(document, { limits, recogniser });
