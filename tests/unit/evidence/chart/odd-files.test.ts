@@ -81,6 +81,24 @@ describe('odd ways of writing', () => {
           .replaceAll('\n', '\r'),
       ),
     ],
+    [
+      'a row for each reading',
+      bytes(
+        new TextDecoder()
+          .decode(
+            table(
+              '',
+              (clock, s) =>
+                `2026-03-25 ${clock};TC1;${degrees(s)};F\n2026-03-25 ${clock};TC2;${degrees(s) + 2};F`,
+            ),
+          )
+          .replace('\n', 'Time;Channel;Value;Unit\n'),
+      ),
+    ],
+    [
+      'the number of the load in each row',
+      table('Load No;Time;TC1 °F', (clock, s) => `12;2026-03-25 ${clock};${degrees(s)}`),
+    ],
     ['units in cells', table('Time,TC1', (clock, s) => `2026-03-25 ${clock},${degrees(s)} °F`)],
   ])('%s', (_, file) => {
     const read = readChart(file, ASKED);
@@ -89,6 +107,57 @@ describe('odd ways of writing', () => {
       '2026-03-25T08:06:30',
       14,
     ]);
+  });
+
+  test('a plunge of which the transfer is not to be seen leaves the delay open', () => {
+    const rows = Array.from(
+      { length: 200 },
+      (_, s) => `${s},${s < 120 ? 920 + (s % 2) : Math.max(80, 920 - (s - 120) * 150)}`,
+    );
+    const read = readChart(bytes(['Time (s),TC1', ...rows].join('\n')), {
+      ...ASKED,
+      soakMinutes: 1,
+      maxQuenchDelayS: 10,
+    });
+    expect([read.quench_delay_s, read.verdict]).toEqual([null, 'review']);
+  });
+
+  test('a thermocouple without readings inside the soak makes it a review', () => {
+    const rows = (empty: (s: number) => boolean) =>
+      bytes(
+        [
+          'Time (s),TC1,TC2',
+          ...Array.from({ length: 400 }, (_, s) => `${s},920.5,${empty(s) ? '' : 919}`),
+        ].join('\n'),
+      );
+    const read = readChart(
+      rows((s) => s > 100 && s < 160),
+      ASKED,
+    );
+    expect([read.verdict, read.flags.map(({ code, channel }) => [code, channel])]).toEqual([
+      'review',
+      [['gap', 'TC2']],
+    ]);
+    expect(
+      readChart(
+        rows((s) => s > 250),
+        ASKED,
+      ).verdict,
+    ).toBe('review');
+    // Written in every other row, it is all there.
+    expect(
+      readChart(
+        rows((s) => s % 2 === 1),
+        ASKED,
+      ),
+    ).toMatchObject({ verdict: 'pass', flags: [] });
+  });
+
+  test('a long file that counts from zero is read to its end', () => {
+    for (const count of [2000, 5000, 8000, 20_000]) {
+      const rows = Array.from({ length: count }, (_, s) => `${s * 2},${900 + (s % 7)}.5,${905 + (s % 5)}.5`);
+      expect(readChart(bytes(['Time (s),TC1,TC2', ...rows].join('\n')), ASKED).understood.rows).toBe(count);
+    }
   });
 
   test('rows of one minute without seconds are spread over it', () => {
