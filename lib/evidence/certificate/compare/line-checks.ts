@@ -5,7 +5,7 @@ import { namesOrder } from '../match/same-order-number';
 import type { Check, Compared } from './compared';
 import { cannotTell, doubtful, meets, notStated, observed, wrong, type Outcome } from './outcome';
 import { isOnThePage, transposedOnThePage } from './on-the-page';
-import type { LinePair, StatedLine } from './pair-lines';
+import { piecesOf, type LinePair, type StatedLine } from './pair-lines';
 
 /** Each ordered part is on the certificate under its number, and nothing else is. */
 export const showsEachPart: Check = (compared) => {
@@ -16,7 +16,11 @@ export const showsEachPart: Check = (compared) => {
   const areAllMissing = parts.every((part) => part.wrong?.code === 'part_number_missing');
   return [
     ...(compared.stated.lines.length === 0 && areAllMissing ? [noPartsListed(compared)] : parts),
-    ...unknown.slice(unread).map((line) => unknownPart(line, compared)),
+    // A number without pieces, revision or lot certifies nothing; mostly it is no part.
+    ...unknown
+      .filter((line) => piecesOf(line) !== null || line.rev !== null || line.lot !== null)
+      .slice(unread)
+      .map((line) => unknownPart(line, compared)),
   ];
 };
 

@@ -46,3 +46,17 @@ export function transposedOnThePage(
     ) ?? null
   );
 }
+
+/**
+ * Whether a step is spoken of on the pages, by its name and by one of its numbers: then it is stated, although it was not
+ * read as what it is.
+ */
+export const speaksOf = (
+  name: RegExp,
+  numbers: readonly number[],
+  pages: readonly Pick<Page, 'words'>[],
+): boolean => {
+  const words = pages.flatMap((page) => page.words.map(({ text }) => text));
+  const figures = new Set(words.flatMap((word) => word.match(/\d+(?:\.\d+)?/g) ?? []).map(Number));
+  return words.some((word) => name.test(word)) && numbers.some((number) => figures.has(number));
+};

@@ -248,6 +248,7 @@ const PLANTED: Record<string, Case[]> = {
   conductivity_out_of_range: [
     ['in % IACS', HEAT, { readings: [reading('conductivity', '%IACS', 33)] }],
     ['in MS/m', HEAT, { readings: [reading('conductivity', 'MS/m', 19.1)] }],
+    ['ten times too much, in print', HEAT, { readings: [reading('conductivity', '% IACS', 30.1, 325)] }],
     ['without a unit', HEAT, { readings: [reading('conductivity', null, 40)] }],
   ],
   readings_impossible_together: [
@@ -276,7 +277,15 @@ const PLANTED: Record<string, Case[]> = {
     ['metric', PLATE, { readings: [reading('thickness', 'µm', 7.4)] }],
     ['in inches', PLATE, { readings: [reading('thickness', 'in', 0.0002)] }],
   ],
-  bake_missing: [['', PLATE, { cycles: [], bake_start: null, bake_end: null }]],
+  bake_missing: [
+    ['', PLATE, { cycles: [], bake_start: null, bake_end: null }],
+    [
+      'said not to be done',
+      PLATE,
+      { cycles: [], bake_start: null, bake_end: null },
+      { file: { ...FILE, pages: [withWords('Bake: N/A')] } },
+    ],
+  ],
   bake_started_late: [['', PLATE, { bake_start: '2026-03-06T18:11', bake_end: '2026-03-08T18:11' }]],
   bake_too_short: [
     ['by its times', PLATE, { bake_end: '2026-03-07T14:00' }],
@@ -401,6 +410,35 @@ const RIGHT: Case[] = [
     { lines: [] },
     { file: { ...FILE, pages: [withWords('10-200 and 10-311')] } },
   ],
+  [
+    'a bake on the page that was not read',
+    PLATE,
+    { cycles: [], bake_start: null, bake_end: null },
+    { file: { ...FILE, pages: [withWords('Baked: 375F for 23.5 hours')] } },
+  ],
+  [
+    'ageing on the page that was not read',
+    HEAT,
+    { cycles: agreeing(HEAT).cycles.slice(0, 1) },
+    { file: { ...FILE, pages: [withWords('Aged naturally 96 hours')] } },
+  ],
+  [
+    'a number without pieces',
+    HEAT,
+    {
+      lines: [
+        ...agreeing(HEAT).lines,
+        {
+          ...lineOf(HEAT),
+          part_number: 'TEMP 900',
+          rev: null,
+          lot: null,
+          qty_accepted: null,
+          qty_rejected: null,
+        },
+      ],
+    },
+  ],
   ['minutes misread as hours', HEAT, cycles(HEAT, 'solution', { minutes: 38 * 60 })],
   ['one time for start and end', HEAT, cycles(HEAT, 'solution', { soak_end: '2026-03-05T09:12' })],
   ['two specifications', HEAT, { specification: 'AMS2750, AMS2770R', specification_revision: null }],
@@ -436,6 +474,12 @@ const RIGHT: Case[] = [
     'two scales of hardness',
     HEAT,
     { readings: [reading('hardness', 'HRB', 70), reading('hardness', 'HB', 110)] },
+  ],
+  [
+    'a reading whose point was not recognised',
+    HEAT,
+    { readings: [reading('conductivity', '% IACS', 30.1, 325), reading('hardness', 'HRB', 70.5, 71, 690)] },
+    { file: { ...FILE, recognised: true } },
   ],
   ['micrometres', PLATE, { readings: [reading('thickness', 'µm', 7.62, 12.7)] }],
   ['micrometres at their rounded end', PLATE, { readings: [reading('thickness', 'microns', 7.6)] }],
