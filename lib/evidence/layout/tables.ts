@@ -64,14 +64,19 @@ function headingAt<Heading>(
     const used = lines.slice(at, at + height);
     const [last, before] = [used[height - 1], used[height - 2]];
     if (!last || (before && last.box[1] - before.box[3] > 0.9 * last.height)) break;
-    if (last.segments.some(({ text }) => /\d.*\d/.test(text.replace(/\([^)]*\)/g, '')) || text.length > 60))
+    if (
+      last.segments.some(
+        ({ text }) => /\d.*\d/.test(text.replace(/\([^)]*\)|^\d{1,2}[.)]/g, '')) || text.length > 60,
+      )
+    )
       break;
     const columns = columnsOf(used).map((column) => ({ ...column, heading: reader.read(column.text) }));
     const known = columns.filter(({ heading }) => heading !== null).length;
     if (known < 2 || known < 0.6 * columns.length) continue;
     // A second line that is a part of headings leaves them headings; a row of values would not.
     const isPart =
-      last.segments.length < columns.length && last.segments.every((segment) => isUnderHeading(segment, columns));
+      last.segments.length < columns.length &&
+      last.segments.every((segment) => isUnderHeading(segment, columns));
     if (!best || known > best.known || (known === best.known && isPart)) best = { columns, height, known };
   }
   return best;
@@ -156,6 +161,7 @@ function endsAt<Heading>(
   if (line.segments.some((segment) => reader.endsTable(segment))) return true;
   if (headingAt(lines, at, reader) !== null) return true;
   const [only, second, third] = line.segments;
+  if (line.segments.some(({ text }) => SUM.test(text))) return true;
   // A label with its value under a table of more columns is a field of its own.
   if (only && second && !third && columns.length >= 4 && reader.read(only.text) !== null) return true;
   // A sentence under the table, which runs through its columns.
@@ -164,6 +170,9 @@ function endsAt<Heading>(
     : [];
   return line.segments.length === 1 && crossed.length > 1 && (only?.words.length ?? 0) > 4;
 }
+
+/** A row that adds up the others is the last, and none of them. */
+const SUM = /^(?:grand |sub-?)?(?:totals?|summe|gesamt|sum)\b\s*:?(?:\s*\d*)$/i;
 
 /** The words of a line, each in the column it stands under. */
 function cellsOf(line: Line, columns: readonly Column<unknown>[]): Passage[][] {

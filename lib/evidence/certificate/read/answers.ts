@@ -91,12 +91,16 @@ function rowLabelled({ table, row, name, order }: RowPlace): Answer[] | null {
   const headings = table.columns.map(({ heading }) => heading);
   const results = headings.flatMap((heading, index) => (heading && FOUND.has(heading.key) ? [index] : []));
   const steps = headings.flatMap((heading, index) => (index > 0 && heading?.step ? [index] : []));
-  const asks = results.length > 0 ? results : steps.length > 1 ? steps : [];
+  const places = headings.flatMap((heading, index) => (heading?.key === 'specimen' ? [index] : []));
+  const asks = results.length > 0 ? results : steps.length > 1 ? steps : places.length > 1 ? places : [];
   const first = row.cells.findIndex(
     (cell, index) => cell !== null && !/^\d{1,2}\.?$/.test(cell.text) && !asks.includes(index),
   );
   const words = row.cells[first]?.text ?? '';
-  const label = labelAtStart(words) ?? labelAtStart(words.replace(/^[^,–-]*[,–-]\s*/, ''));
+  const said = labelAtStart(words) ?? labelAtStart(words.replace(/^[^,–-]*[,–-]\s*/, ''));
+  // The heading of the first column may ask for all: "Hardness HRB | 1 | 2 | 3".
+  const label =
+    asks === places && (said === null || said.key === 'result') ? (headings[first] ?? said) : said;
   if (asks.length === 0 || !label) return null;
   const unit = headings.findIndex((heading) => heading?.key === 'unit');
   const aside = row.cells[unit]?.text ?? '';

@@ -18,7 +18,7 @@ const CHANGE = new RegExp(
   'giu',
 );
 const ALUMINIUM_CHANGE =
-  /(?<![\d-])([1-8]\d{3})\s?-?\s?(O|0|F|W|T\d{1,4}|H\d{2,3})\s*(?:to|->|→|=>|–|nach|auf|en|vers|a|à|into)\s*(?:([1-8]\d{3})\s?-?\s?)?(O|F|W|T\d{1,4})(?![\p{L}\d])/iu;
+  /(?<![\d-])([1-8]\d{3})\s?-?\s?(O|0|F|W|T\d{1,4}|H\d{2,3})\s*(?:to|->|→|=>|–|nach|auf|en|vers|a|à|into)\s*(?:([1-8]\d{3})\s?-?\s?)?(O|F|W|[T7]\d{1,4})(?![\p{L}\d])/iu;
 
 /**
  * Class, type, method and the like as one designation, or the change of condition that was made.
@@ -46,8 +46,11 @@ function changeIn(passage: Passage): Candidate<string>[] {
   if (!match || !spot) return [];
   const [, alloy = '', from = '', again, to = ''] = match;
   const before = from === '0' ? 'O' : from.toUpperCase();
-  return [{ value: `${alloy}-${before} to ${again ?? alloy}-${to.toUpperCase()}`, spot, trust: 0.9 }];
+  return [{ value: `${alloy}-${before} to ${again ?? alloy}-${afterTemper(to)}`, spot, trust: 0.9 }];
 }
+
+/** A T that was recognised as a 7: tempers begin with letters. */
+const afterTemper = (written: string): string => written.toUpperCase().replace(/^7/, 'T');
 
 function conditionChange(answer: Answer): Candidate<string>[] {
   if (answer.key !== 'condition' && answer.key !== 'class_type') return [];
@@ -115,13 +118,25 @@ function designation(text: string): string | null {
   return match && spelled(match[0]);
 }
 
+/** Magnetic particle inspection is ordered in words. */
+const MEDIUM =
+  /\b(?:wet|dry)\b[\s,-]*(?:(?:continuous|residual|fluorescent|visible|magnetic particle|method|powder)\b[\s,-]*){1,3}/giu;
+
 function designationsIn(passage: Passage): Candidate<string>[] {
-  return [...passage.text.matchAll(DESIGNATION)].flatMap((match) => {
-    const spot = spotIn(passage, match.index, match.index + match[0].length);
-    // "Level 2" alone is a person's, "Method A" alone may be anything.
-    const alone = /^(?:level|sensitivity|method|form)/i.test(match[0]);
-    return spot ? [{ value: spelled(match[0]), spot, trust: alone ? 0.1 : 0.55 }] : [];
+  const media = [...passage.text.matchAll(MEDIUM)].flatMap((match) => {
+    const value = match[0].replace(/[\s,-]+$/, '');
+    const spot = spotIn(passage, match.index, match.index + value.length);
+    return spot ? [{ value, spot, trust: 0.4 }] : [];
   });
+  return [
+    ...media,
+    ...[...passage.text.matchAll(DESIGNATION)].flatMap((match) => {
+      const spot = spotIn(passage, match.index, match.index + match[0].length);
+      // "Level 2" alone is a person's, "Method A" alone may be anything.
+      const alone = /^(?:level|sensitivity|method|form)/i.test(match[0]);
+      return spot ? [{ value: spelled(match[0]), spot, trust: alone ? 0.1 : 0.55 }] : [];
+    }),
+  ];
 }
 
 /** "TYPE II, CL. 2" as "Type II Class 2". */
@@ -160,7 +175,7 @@ export function conditions(paper: Paper, classType: string | null): Candidate<st
   const changed = paper.paragraphs.flatMap((paragraph) => {
     const match = ALUMINIUM_CHANGE.exec(paragraph.text);
     const spot = match && spotIn(paragraph, match.index, match.index + match[0].length);
-    return match?.[4] && spot ? [{ value: match[4].toUpperCase(), spot, trust: classType ? 0.85 : 0.7 }] : [];
+    return match?.[4] && spot ? [{ value: afterTemper(match[4]), spot, trust: classType ? 0.85 : 0.7 }] : [];
   });
   return [...asked, ...said, ...changed];
 }

@@ -1,5 +1,8 @@
 import { spotIn, type Passage, type Spot } from '../../layout/passage';
+import { heightOf, widthOf } from '../../layout/box';
+import type { Box } from '../../page';
 import { figures } from './dates';
+import { labelAtStart } from './find-labels';
 import { numberFrom, type DecimalSign } from './quantities';
 
 export interface Reading<Value> {
@@ -81,7 +84,7 @@ export interface PartRead {
  * @example `10-200 Rev. A`, `10-200/A` and `10-200 (A)` are part 10-200 revision A
  */
 export function partIn(passage: Passage, isDate: (text: string) => boolean): Reading<PartRead> | null {
-  const code = codeIn(passage, isDate);
+  const code = answersOther(passage.text) ? null : codeIn(passage, isDate);
   if (!code) return null;
   const at = passage.text.replace(/–/g, '-').indexOf(code.spot.raw.replace(/–/g, '-'));
   const glued = /^(.{3,}[\dA-Z])\/([A-Z])$/.exec(code.value);
@@ -97,6 +100,12 @@ export function partIn(passage: Passage, isDate: (text: string) => boolean): Rea
   };
 }
 
+/** It begins with another label, and so answers that one. */
+function answersOther(text: string): boolean {
+  const label = labelAtStart(text);
+  return label !== null && label.key !== 'part_number' && label.key !== 'own_number';
+}
+
 /** The letter or number of a revision. */
 export function revisionIn(passage: Passage): Reading<string> | null {
   const match =
@@ -105,8 +114,17 @@ export function revisionIn(passage: Passage): Reading<string> | null {
     );
   const value = match?.[1]?.toUpperCase();
   if (!value || value === '-' || /^n\/?a$/i.test(value)) return null;
-  return readingAt(passage, 0, passage.text.length, value);
+  const [word] = passage.words;
+  return readingAt(
+    passage,
+    0,
+    passage.text.length,
+    word && isOneLetterWide(word.box) ? value.replace(/^(.)\1$/, '$1') : value,
+  );
 }
+
+/** A single letter that was recognised twice is not as wide as two are. */
+const isOneLetterWide = (box: Box): boolean => widthOf(box) < 1.15 * heightOf(box);
 
 const COUNT =
   /^[^\p{L}\d]*(?:(?:qty|quantity)\.?:?\s*)?([\dOoIl|SB]{1,3}(?:[,.' ]\d{3})+|[\dOoIl|SB]{1,6})(?![\d.,/:%\-]*\d)(?!\s*[\p{L}]*\s*(?:°|%))\s*(?:\([^)]*\))?\s*(?:pcs?|pieces?|parts?|ea(?:ch)?|stk|stück|st|units?|each|of\s+\d+|total)?\.?/iu;

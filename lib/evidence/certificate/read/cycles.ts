@@ -4,7 +4,7 @@ import { TRUST, type Answer } from './answers';
 import { cycleAttributesIn, type CycleAttributes } from './cycle-attributes';
 import { dayOf } from './dates';
 import type { LabelKey } from './labels';
-import type { FoundMoment } from './moments';
+import { timesIn, type FoundMoment } from './moments';
 import type { Paper } from './paper';
 import { stepsIn, type Step } from './steps';
 import { localMinute, type WorkDays, workDaysOf } from './work-days';
@@ -87,16 +87,20 @@ export function readCycles(paper: Paper, process: Process | null): ReadCycle[] {
 function asked(paper: Paper, process: Process | null): Observation[] {
   return paper.answers.flatMap((answer): Observation[] => {
     if (!CYCLE_KEYS.has(answer.key) || answer.also.includes('requirement')) return [];
-    const step = stepOf(answer, process);
+    // A finish is a coating, or the end of a soak when a time stands there.
+    const finished =
+      answer.key === 'process' && answer.words === 'finish' && timesIn(textOf(answer)).length > 0;
+    const key = finished ? 'time_out' : answer.key;
+    const step = stepOf({ ...answer, key }, process);
     if (!step) return [];
     for (const { passage, how } of answer.values) {
       const attributes = cycleAttributesIn(
         passage,
         paper.decimal,
-        answer.key,
+        key,
         `${answer.qualifier} ${answer.words}`,
       );
-      if (!fits(answer, attributes, passage)) continue;
+      if (!fits(key, attributes, passage)) continue;
       return [
         {
           step,
@@ -110,6 +114,8 @@ function asked(paper: Paper, process: Process | null): Observation[] {
     return [];
   });
 }
+
+const textOf = ({ values }: Answer): string => values[0]?.passage.text ?? '';
 
 function stepOf(answer: Answer, process: Process | null): Step | null {
   if (BAKE_KEYS.has(answer.key)) return /stress/.test(answer.words) ? 'stress_relief' : bakeStep(process);
@@ -131,7 +137,7 @@ const bakeStep = (process: Process | null): Step =>
 const isBakeTime = ({ words }: Answer): boolean => /oven|bake|soak/.test(words);
 
 /** The label's question is answered; a name of a process that says nothing more is no observation. */
-function fits({ key }: Answer, attributes: CycleAttributes, passage: Passage): boolean {
+function fits(key: LabelKey, attributes: CycleAttributes, passage: Passage): boolean {
   const { temperature, minutes, start, end } = attributes;
   switch (key) {
     case 'temperature':
@@ -226,7 +232,9 @@ function take(
   const from = moment(start);
   if (from) cycle.start ??= from;
   const withStartDay =
-    cycle.start && end && !end.moment.day ? afterStart(cycle.start.value, end.moment.time) : null;
+    cycle.start && end && !end.moment.day && !days.hasTwo(row)
+      ? afterStart(cycle.start.value, end.moment.time)
+      : null;
   const to = withStartDay && end ? { value: withStartDay, spot: end.spot, trust: trust * 0.95 } : moment(end);
   if (to) cycle.end ??= to;
 }

@@ -115,7 +115,8 @@ function labelAt(text: string, plain: string, at: number, first: boolean): Found
   const best = stepped ?? (bare ? { ...bare, step: null } : null);
   if (!best) return null;
   // "PO-5001" is a number and no question for one.
-  if (/^-?\d|^[-/][\p{L}\d]/u.test(text.slice(best.end)) && !text.slice(at, best.end).endsWith('#')) return null;
+  if (/^-?\d|^[-/][\p{L}\d]/u.test(text.slice(best.end)) && !text.slice(at, best.end).endsWith('#'))
+    return null;
   const tail = tailOf(text, plain, best.end, best.phrase.key);
   if (best.phrase.needsColon && !/[:]/.test(text.slice(best.end, tail.end))) return null;
   const standsOut =
@@ -194,6 +195,7 @@ function tailOf(text: string, plain: string, from: number, key: LabelKey): Tail 
     const second = secondLabel(text, plain, end);
     if (second) {
       if (second.key && second.key !== key && !also.includes(second.key)) also.push(second.key);
+      qualifier = `${qualifier} ${text.slice(end, second.end).trim()}`.trim();
       end = second.end;
       continue;
     }

@@ -27,8 +27,8 @@ export const CERTIFICATE_NUMBER: CodeField = {
       'giu',
     ),
     new RegExp(
-      String.raw`\b(?:certificate|certification|cert|coc)\s+((?=[A-Z0-9./-]*\d)[A-Z]{1,5}-?[A-Z0-9./-]+)`,
-      'gu',
+      String.raw`\b(?:certificate|certification|cert|coc)\.?\s+((?=[A-Z0-9./-]*\d)[A-Z]{1,5}-?[A-Z0-9./-]+|\d{2}-\d{3,}|\d{4,})`,
+      'giu',
     ),
   ],
 };
@@ -72,7 +72,13 @@ function fromAnswer(answer: Answer, field: CodeField): Candidate<string>[] {
   const parts = answer.also.length > 0 ? found.value.split(/\s*\/\s*/) : [];
   const value = parts.length === answer.also.length + 1 ? (parts[turn] ?? found.value) : found.value;
   const far = found.how === 'right' || found.how === 'below' ? 0.98 : 1;
-  return [{ value, spot: found.spot, trust: found.trust * far * (answer.marked ? 1 : 0.97) }];
+  return [
+    {
+      value: value.replace(/^P(?:0O|O0|0)(?=-?\d)/, 'PO'),
+      spot: found.spot,
+      trust: found.trust * far * (answer.marked ? 1 : 0.97),
+    },
+  ];
 }
 
 const readCode = (passage: Passage): Reading<string> | null => codeIn(passage, beginsWithDay);

@@ -25,7 +25,22 @@ const COUNTS = {
 
 /** Lines told in sentences: "12 pcs of P/N 10-200 Rev A, lot L1, accepted 12, rejected 0". */
 export function linesInSentences(paper: Paper): ReadLine[] {
-  return paper.paragraphs.flatMap((paragraph) => linesIn(paragraph, paper));
+  return paper.paragraphs.flatMap((paragraph) =>
+    sentencesOf(paragraph).flatMap((sentence) => linesIn(sentence, paper)),
+  );
+}
+
+/** Where a sentence ends: not behind "Rev." or "No.". */
+const SENTENCE_END =
+  /(?<!\b(?:rev|no|nos|nr|qty|inc|co|dwg|pt|approx|mat'l|matl|spec|acc|rej|p\/n|pcs|ea|cond|dia))[.]\s+(?=[\p{Lu}\d(])/giu;
+
+function sentencesOf(paragraph: Passage): Passage[] {
+  const cuts = [...paragraph.text.matchAll(SENTENCE_END)].map(({ index }) => index + 1);
+  const edges = [0, ...cuts, paragraph.text.length];
+  const sentences = edges.slice(1).map((end, turn) => passageFrom(paragraph, edges[turn] ?? 0, end));
+  const telling = sentences.filter(({ text }) => new RegExp(PART.source, 'iu').test(text));
+  // A single part number is told of in all sentences.
+  return telling.length > 1 ? telling : [paragraph];
 }
 
 function linesIn(passage: Passage, paper: Paper): ReadLine[] {

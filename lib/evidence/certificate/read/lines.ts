@@ -51,7 +51,7 @@ const WRITERS: Partial<Record<LabelKey, Writer>> = {
   quantity_received: counted('received'),
   material: (line, value) => {
     const read = cell(wordsIn(value.passage), value);
-    if (read && read.value.length <= 80) line.material ??= read;
+    if (read && read.value.length <= 80) line.material ??= { ...read, value: annealed(read.value) };
     return read !== null;
   },
   lot: coded('lot'),
@@ -63,6 +63,9 @@ const WRITERS: Partial<Record<LabelKey, Writer>> = {
     return serials.length > 0;
   },
 };
+
+/** No temper is nought: 2024-0 is 2024-O. */
+const annealed = (material: string): string => material.replace(/(?<![\d-])([1-8]\d{3})-0(?![\d.])/g, '$1-O');
 
 function counted(field: 'quantity' | 'accepted' | 'rejected' | 'received'): Writer {
   return (line, value, paper) => {

@@ -230,7 +230,9 @@ function inSentences(
     // In a sentence the unit must be said, or any figure would do.
     return found &&
       found.unit !== null &&
-      UNITS[kind].some(({ name, pattern }) => name === found.unit && pattern.test(`${region.text} ${match[0]}`))
+      UNITS[kind].some(
+        ({ name, pattern }) => name === found.unit && pattern.test(`${region.text} ${match[0]}`),
+      )
       ? [{ kind, ...found, trust: 0.7, group: '' }]
       : [];
   });

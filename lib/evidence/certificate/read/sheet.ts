@@ -66,16 +66,28 @@ function headingOf(text: string): FoundLabel | null {
   const [step] = stepsIn(text);
   const names = step?.start === 0 && step.end >= text.trimEnd().length ? step.step : null;
   if (label?.whole) return names && !label.step ? { ...label, step: names } : label;
+  if (PLACE_OF_TEST.test(text)) return plainHeading('specimen', text);
+  // "Cast/lot": one of the two is known.
+  const half = text.includes('/') ? text.split('/').map((part) => labelAtStart(part.trim())) : [];
+  const known = half.find((one) => one?.whole);
+  if (known) return { ...known, words: text.toLowerCase() };
   if (!names) return null;
-  const end = text.length;
+  return { ...plainHeading('process', text), step: names };
+}
+
+/** Columns for the places or pieces of a test: "No. 2", "Specimen 3", "4". */
+const PLACE_OF_TEST =
+  /^(?:(?:no|nr|specimen|sample|piece|pc|test|reading|probe|point|place|location|pos)\.?\s*)?#?\s*\d{1,2}$/i;
+
+function plainHeading(key: FoundLabel['key'], text: string): FoundLabel {
   const words = text.toLowerCase();
   return {
-    key: 'process',
+    key,
     words,
     also: [],
-    step: names,
+    step: null,
     start: 0,
-    end,
+    end: text.length,
     marked: false,
     qualifier: '',
     whole: true,

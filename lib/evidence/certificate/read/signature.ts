@@ -81,7 +81,7 @@ function looseStroke(paper: Paper): Spot | null {
   for (const sheet of paper.sheets) {
     const mark = sheet.marks.find(
       ({ kind, box }) =>
-        kind === 'stroke' && box[1] > 0.4 * sheet.height && widthOf(box) > 25 && heightOf(box) > 6,
+        kind === 'stroke' && box[1] > 0.25 * sheet.height && widthOf(box) > 25 && heightOf(box) > 6,
     );
     if (mark) return spotOfMark(sheet, mark);
   }
