@@ -16,6 +16,7 @@ export const SHOP_GRANTS: Record<string, readonly Verb[] | Columns> = {
   processors: READ,
   shop_processors: KEEP,
   approvals: KEEP,
+  equipment: KEEP,
   counters: KEEP,
   users: {
     select: ['id', 'email', 'name', 'active', 'units', 'single_keys', 'session_version', 'created_at'],

@@ -4,6 +4,7 @@ import * as batches from '@/lib/batches/endpoints';
 import * as certificates from '@/lib/certificates/endpoints';
 import * as charts from '@/lib/charts/endpoints';
 import * as dossiers from '@/lib/dossiers/endpoints';
+import * as equipment from '@/lib/equipment/endpoints';
 import * as files from '@/lib/files/endpoints';
 import * as invoices from '@/lib/invoices/endpoints';
 import * as jobs from '@/lib/jobs/endpoints';
@@ -36,6 +37,7 @@ export const ALL_ENDPOINTS: readonly Endpoint[] = [
   certificates,
   charts,
   dossiers,
+  equipment,
   files,
   invoices,
   jobs,

@@ -1,6 +1,8 @@
 import type { Check, CheckFacts } from './check';
 import { hasReheatsLeft } from './clad-checks';
 import { canBeMade } from './condition-checks';
+import { isHotEnough } from './furnace-checks';
+import { fitsIn } from './envelope-checks';
 import { CHECK_LEVELS, type Finding } from './finding';
 import { hasLines, isCurrent, isOneStep, isProvable } from './line-checks';
 import { statesWhatIsAsked } from './ordering-checks';
@@ -20,6 +22,8 @@ const CHECKS: readonly Check[] = [
   hasReheatsLeft,
   standsInOrder,
   sharesLoads,
+  fitsIn,
+  isHotEnough,
   isApprovedUntilBack,
   isInForce,
   meansWhatItSays,

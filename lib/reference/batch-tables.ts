@@ -1,5 +1,6 @@
 import type { Table } from '@/lib/trade/table';
 import type { LoadTables } from '@/lib/trade/heat-treat/load-needs';
+import type { ClassNeededRow } from '@/lib/trade/pyrometry/class-needed';
 import type { CodeLetterRow } from '@/lib/trade/sampling/code-letter';
 import type { SingleSamplingRow } from '@/lib/trade/sampling/single-sampling-plan';
 import { ACCEPTANCE, type AcceptanceRow } from '@/lib/trade/tables/acceptance';
@@ -11,6 +12,7 @@ import {
   CLAD_TREATMENTS_AMS,
   type CladReheatRow,
 } from '@/lib/trade/tables/clad-reheats';
+import { FURNACE_CLASSES_NEEDED } from '@/lib/trade/tables/furnace-classes-needed';
 import { MELTING } from '@/lib/trade/tables/melting';
 import { NDT_DESIGNATIONS, type NdtDesignationRow } from '@/lib/trade/tables/ndt-designations';
 import { QUENCH_DELAYS } from '@/lib/trade/tables/quench-delays';
@@ -57,6 +59,7 @@ export interface RequirementTables {
   readonly steelWindows: Table<SteelWindowRow>;
   readonly steelTempering: Table<SteelTemperingRow>;
   readonly ndt: Table<NdtDesignationRow>;
+  readonly furnaceClasses: Table<ClassNeededRow>;
   readonly codeLetters: Table<CodeLetterRow>;
   readonly sampling: Readonly<Record<'normal' | 'tightened' | 'reduced', Table<SingleSamplingRow>>>;
 }
@@ -68,6 +71,7 @@ const REQUIREMENTS: RequirementTables = {
   steelWindows: STEEL_WINDOWS,
   steelTempering: STEEL_TEMPERING,
   ndt: NDT_DESIGNATIONS,
+  furnaceClasses: FURNACE_CLASSES_NEEDED,
   codeLetters: CODE_LETTERS,
   sampling: {
     normal: SINGLE_SAMPLING_NORMAL,

@@ -27,7 +27,7 @@ export async function proposeForStep(ctx: Ctx, asked: z.output<(typeof declarati
   const part: CheckedPart = {
     ...{ id: '', alloy, form, clad: asked.clad === '1', madeCondition, endCondition },
     ...typedSizes({ length: '', width: '', height: '', thickness }),
-    ...{ thickness: orNull(thickness), massG: null, areaMm2: null, route: [step] },
+    ...{ thickness: orNull(thickness), massG: null, areaMm2: null, sizeWords: null, route: [step] },
   };
   const line = { id: '', stepId: '', part, step, ordering: {}, pieces: null, units, load: null };
   return { proposals: proposeRequirements(tablesOf(ctx), line) };

@@ -76,6 +76,7 @@ const TABLES = {
   nonconformanceId: 'nonconformances',
   documentId: 'batch_documents',
   approvalId: 'approvals',
+  equipmentId: 'equipment',
   releaseId: 'releases',
   locationId: 'locations',
   messageId: 'messages',
