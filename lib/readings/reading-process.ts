@@ -3,7 +3,10 @@ import { constants, setPriority } from 'node:os';
 import { statedIn } from '@/lib/evidence/certificate/read/read-certificate';
 import { readChart } from '@/lib/evidence/chart/read-chart';
 import { readInvoice } from '@/lib/evidence/invoice/read-invoice';
+import { makeRecogniser } from '@/lib/evidence/open/recogniser';
+import { boxAsFiled, factsAsFiled } from '@/lib/evidence/open/as-filed';
 import { openFile } from '@/lib/evidence/open/open-file';
+import type { Fact } from '@/lib/evidence/fact';
 import { UnreadableFile, type OpenedFile, type Page } from '@/lib/evidence/page';
 
 import type { KeptChart } from '@/lib/charts/kept-chart';
@@ -15,6 +18,9 @@ import type { ReadingAnswer, ReadingRequest } from './reading-request';
  * behind everything else that wants the machine, so that pages are answered while scans are read.
  */
 setPriority(constants.priority.PRIORITY_BELOW_NORMAL);
+
+// One for all files: starting it takes longer than reading a page.
+const recogniser = makeRecogniser();
 
 process.on('message', (request: ReadingRequest) => {
   void answer(request).then((reply) => process.send?.(reply));
@@ -41,12 +47,16 @@ async function read({ kind, name, bytes, ask }: ReadingRequest): Promise<ReadCon
     if (!ask) throw new Error('a chart is held against something');
     return { content: { ...ask, judged: readChart(bytes, ask.requirement, ask.corrections) }, pages: [] };
   }
-  const opened = await openFile(bytes, { name });
+  const opened = await openFile(bytes, { name, recogniser });
   const pages = opened.pages.map(keptPage);
   const file = readFile(opened);
+  const shown = <Stated extends { facts: Fact[] }>(stated: Stated): Stated => ({
+    ...stated,
+    facts: factsAsFiled(stated.facts, opened.pages),
+  });
   return kind === 'invoice'
-    ? { content: { file, invoice: readInvoice(opened) }, pages }
-    : { content: { file, certificates: statedIn(opened) }, pages };
+    ? { content: { file, invoice: shown(readInvoice(opened)) }, pages }
+    : { content: { file, certificates: statedIn(opened).map(shown) }, pages };
 }
 
 const readFile = ({ sha256, kind, recognised, pages }: OpenedFile): ReadFile => ({
@@ -59,16 +69,17 @@ const readFile = ({ sha256, kind, recognised, pages }: OpenedFile): ReadFile => 
 
 const tenth = (points: number) => Math.round(points * 10) / 10;
 
-const keptPage = ({ number, width, height, turned, words }: Page): KeptPage => ({
-  number,
-  width,
-  height,
-  turned,
-  words: words.map(({ text, box: [left, top, right, bottom] }) => [
-    text,
-    tenth(left),
-    tenth(top),
-    tenth(right),
-    tenth(bottom),
-  ]),
-});
+function keptPage(page: Page): KeptPage {
+  const { number, turned, words, asFiled } = page;
+  const { width, height } = asFiled ?? page;
+  return {
+    number,
+    width,
+    height,
+    turned,
+    words: words.map(({ text, box }) => {
+      const [left, top, right, bottom] = boxAsFiled(page, box);
+      return [text, tenth(left), tenth(top), tenth(right), tenth(bottom)];
+    }),
+  };
+}

@@ -70,10 +70,10 @@ export async function returnedBatch(lead: Person, pieces: number): Promise<Retur
   const version = async () => (await read<{ version: number }>(lead, `batches/${id}`)).version;
   await ask(lead, `batches/${id}`, { version: await version(), wantedBackOn: dayIn(14) }, 'patch');
   await ask(lead, `batches/${id}/dispatch`, { version: await version() });
-  const { lines } = await read<{ lines: { lineId: string }[] }>(lead, `receipts/batches/${id}`);
+  const { lines } = await read<{ lines: { id: string }[] }>(lead, `receipts/batches/${id}`);
   await ask(lead, 'receipts', {
     batchId: id,
-    lines: lines.map(({ lineId }) => ({ lineId, good: pieces })),
+    lines: lines.map((line) => ({ lineId: line.id, good: pieces })),
   });
   const batch = await read<{ number: string; orderNumber: string }>(lead, `batches/${id}`);
   const lot = await read<{ number: string }>(lead, `lots/${lotId}`);

@@ -18,7 +18,7 @@ export const isBaked: Check = ({ stated, order, pages }) => {
   const cycles = bakesOf(stated);
   const least = bake.min_hours === undefined ? '' : ` ${bake.min_hours} h`;
   const asked = { requirement: `bake${least} after plating`, ordered: `bake${least}` };
-  if (cycles.length === 0 && speaksOf(NAMES, [bake.set_f, bake.min_hours ?? NaN], pages))
+  if (cycles.length === 0 && speaksOf(NAMES, [bake.set_f ?? NaN, bake.min_hours ?? NaN], pages))
     return [cannotTell(asked, 'The page speaks of a bake that could not be read.')];
   if (cycles.length === 0)
     return [
