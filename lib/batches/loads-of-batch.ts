@@ -51,6 +51,24 @@ export function loadsOfBatch<Line extends LoadLine>(
   tables: BatchTables,
   lines: readonly Line[],
 ): LoadsOfBatch<Line> | null {
+  const known = PLANNED.get(lines);
+  // What was planned of these very lines holds these very lines.
+  if (known?.tables === tables) return known.plan as LoadsOfBatch<Line> | null;
+  const plan = planOf(tables, lines);
+  PLANNED.set(lines, { tables, plan });
+  return plan;
+}
+
+/** Several checks ask for the plan of the same lines. */
+const PLANNED = new WeakMap<
+  readonly LoadLine[],
+  { tables: BatchTables; plan: LoadsOfBatch<LoadLine> | null }
+>();
+
+function planOf<Line extends LoadLine>(
+  tables: BatchTables,
+  lines: readonly Line[],
+): LoadsOfBatch<Line> | null {
   const treated = lines.filter(({ step }) => isLoadProcess(step.process));
   if (treated.length === 0) return null;
   const kinds = new Map(treated.map((line) => [line, kindOf(line)]));

@@ -1,5 +1,5 @@
 import { checkBatch } from '@/lib/batches/checks';
-import type { CheckedEquipment, CheckedLine } from '@/lib/batches/check';
+import type { CheckedEquipment, CheckedLine, CheckFacts } from '@/lib/batches/check';
 import { loadsOfBatch } from '@/lib/batches/loads-of-batch';
 import { BATCH_TABLES } from '@/lib/reference/batch-tables';
 import type { ProductForm } from '@/lib/trade/process';
@@ -70,11 +70,13 @@ const shared = sameParts.map((one, at) => {
 });
 const batch = (lines: readonly CheckedLine[]) => factsOf(lines, { processor: { equipment: [ROOM] } });
 const [ofForty, ofAll] = [batch(shared), batch(sameParts)];
+/** What is remembered of the same lines must not flatter the figures. */
+const anew = (facts: CheckFacts): CheckFacts => ({ ...facts, lines: [...facts.lines] });
 const groups = Array.from({ length: GROUPS }, (_, at) => line(at + 1, at));
 
 const results = [
-  timed(`All checks, ${LINES} lines of 40 parts`, 20, () => checkBatch(ofForty)),
-  timed(`All checks, ${LINES} lines of ${LINES} parts`, 20, () => checkBatch(ofAll)),
-  timed(`Load plan, ${GROUPS} groups`, 50, () => loadsOfBatch(BATCH_TABLES, groups)),
+  timed(`All checks, ${LINES} lines of 40 parts`, 20, () => checkBatch(anew(ofForty))),
+  timed(`All checks, ${LINES} lines of ${LINES} parts`, 20, () => checkBatch(anew(ofAll))),
+  timed(`Load plan, ${GROUPS} groups`, 50, () => loadsOfBatch(BATCH_TABLES, [...groups])),
 ];
 process.exitCode = results.every(Boolean) ? 0 : 1;
