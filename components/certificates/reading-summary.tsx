@@ -81,12 +81,11 @@ function ConfirmAll({ proving }: { proving: Proving }) {
     const proposal = one.decision ? undefined : reading.proposalOf(one.id);
     return proposal?.verdict === 'meets' && isSure(proposal.confidence);
   });
-  const lines = data.lines.filter(
-    (line) =>
-      line.coverable > 0 &&
-      proving.pieces[line.id] == null &&
-      reading.piecesOf(line.lineNo)?.pieces === line.coverable,
-  );
+  const lines = data.lines.flatMap((line) => {
+    const pieces = reading.piecesOf(line.lineNo)?.pieces ?? 0;
+    const isOpen = proving.pieces[line.id] == null && pieces > 0 && pieces <= line.coverable;
+    return isOpen ? [[line.id, pieces] as const] : [];
+  });
   const { certificate } = data;
   const [number, datedOn] = [reading.data?.certificateNumber, reading.data?.certificateDate];
   const isNumberOpen = certificate.number === null && number != null && datedOn != null;
@@ -103,7 +102,7 @@ function ConfirmAll({ proving }: { proving: Proving }) {
         { verdict: 'meets', stated: 'as ordered' },
         (one) => reading.proposalOf(one.id)?.stated || 'as ordered',
       );
-    proving.setAllPieces(Object.fromEntries(lines.map((line) => [line.id, line.coverable])));
+    proving.setAllPieces(Object.fromEntries(lines));
   };
   return (
     <Button shortcut="W" onClick={confirm}>

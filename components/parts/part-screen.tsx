@@ -18,6 +18,7 @@ import { getPart, type Part } from '@/lib/parts/contract';
 import { LotsOfPart } from './lots-of-part';
 import { Conditions } from './parts-screen';
 import { RouteOfPart } from './route-of-part';
+import { EnteredMeasure, SizesOfPart } from './sizes-of-part';
 
 /** One revision of a part: its route, its lots and where their pieces are. */
 export function PartScreen({ partId }: { partId: string }) {
@@ -60,7 +61,7 @@ export function PartScreen({ partId }: { partId: string }) {
                 <p className="py-2 text-dispatched-ink">None yet for rev {part.revision}.</p>
               )}
             </Section>
-            <Sizes part={part} />
+            <SizesOfPart part={part} />
             {part.neededFor.length > 0 && <NeededFor part={part} />}
             {part.note && (
               <Section title="Note">
@@ -106,7 +107,10 @@ function headCells(part: Part) {
           {
             caption: 'Thickness',
             value: (
-              <Measure entered={part.thickness.entered} base={inBaseUnit(part.thickness.value, 'length')} />
+              <EnteredMeasure
+                entered={part.thickness.entered}
+                base={inBaseUnit(part.thickness.value, 'length')}
+              />
             ),
           },
         ]
@@ -114,44 +118,6 @@ function headCells(part: Part) {
     { caption: 'Condition', value: <Conditions made={part.madeCondition} end={part.endCondition} /> },
     { caption: 'Pieces', value: part.serialised ? 'each with its serial' : 'not numbered' },
   ];
-}
-
-/** As it was typed, and what that is in SI where it is something else. */
-function Measure({ entered, base }: { entered: string; base: string }) {
-  return (
-    <span className="whitespace-nowrap">
-      <span className="num">{entered}</span>
-      {entered.replace(/\s/g, '') !== base.replace(/\s/g, '') && (
-        <span className="num text-source font-normal text-quiet"> {base}</span>
-      )}
-    </span>
-  );
-}
-
-function Sizes({ part }: { part: Part }) {
-  const all = [
-    { says: 'Length', measure: part.length, quantity: 'length' },
-    { says: 'Width', measure: part.width, quantity: 'length' },
-    { says: 'Height', measure: part.height, quantity: 'length' },
-    { says: 'Mass of one', measure: part.mass, quantity: 'mass' },
-    { says: 'Area of one', measure: part.area, quantity: 'area' },
-  ] as const;
-  const known = all.filter(({ measure }) => measure !== null);
-  if (known.length === 0) return null;
-  return (
-    <Section title="Size">
-      <dl className="grid grid-cols-[7rem_minmax(0,1fr)] gap-x-3 gap-y-1.5 py-1.5">
-        {known.map(({ says, measure, quantity }) => (
-          <div key={says} className="contents">
-            <dt className="text-quiet">{says}</dt>
-            <dd>
-              {measure && <Measure entered={measure.entered} base={inBaseUnit(measure.value, quantity)} />}
-            </dd>
-          </div>
-        ))}
-      </dl>
-    </Section>
-  );
 }
 
 function NeededFor({ part }: { part: Part }) {

@@ -3,6 +3,10 @@ import { Empty } from '@/components/ui/empty';
 import { Section } from '@/components/ui/section';
 import { Cell, Row, Table } from '@/components/ui/table';
 import type { Part, RouteStep } from '@/lib/parts/contract';
+import { orderingForm } from '@/lib/parts/ordering-form';
+import { statedItems } from '@/lib/parts/ordering-answers';
+import { PART_TABLES } from '@/lib/reference/published-tables';
+import { ORDER_ITEM_WORDS } from '@/lib/trade/ordering/order-item';
 import { PROCESS_WORDS } from '@/lib/trade/process';
 
 const PROOF_COLUMNS = [{ says: 'To be proved' }, { says: 'Limit' }, { says: 'From' }];
@@ -23,14 +27,14 @@ export function RouteOfPart({ part }: { part: Part }) {
       )}
       <ol>
         {part.route.map((step) => (
-          <Step key={step.id} step={step} />
+          <Step key={step.id} step={step} endCondition={part.endCondition} />
         ))}
       </ol>
     </Section>
   );
 }
 
-function Step({ step }: { step: RouteStep }) {
+function Step({ step, endCondition }: { step: RouteStep; endCondition: string }) {
   return (
     <li className="grid grid-cols-[1.75rem_minmax(0,1fr)] border-b border-rule py-2.5">
       <span className="num text-quiet">{step.seq}</span>
@@ -58,6 +62,7 @@ function Step({ step }: { step: RouteStep }) {
             </span>
           )}
         </div>
+        <OrderOfStep step={step} endCondition={endCondition} />
         {step.note && <p className="[overflow-wrap:anywhere] text-quiet">{step.note}</p>}
         {step.toProve.length > 0 && (
           <Table label={`To be proved at step ${step.seq}`} columns={PROOF_COLUMNS} dense className="mt-1">
@@ -79,5 +84,42 @@ function Step({ step }: { step: RouteStep }) {
         )}
       </div>
     </li>
+  );
+}
+
+/** What the order states for the step beside its fields, and what its specification still wants stated. */
+export function OrderOfStep({ step, endCondition }: { step: RouteStep; endCondition: string }) {
+  const stated = statedItems(step.ordering);
+  const form = orderingForm(PART_TABLES, {
+    specification: step.specification,
+    specificationRevision: step.specificationRevision ?? '',
+    classType: step.classType ?? '',
+    conditionBefore: step.conditionBefore ?? '',
+    targetCondition: step.targetCondition ?? '',
+    ordering: step.ordering,
+    characteristics: step.toProve.map(({ characteristic }) => characteristic),
+    endCondition,
+  });
+  const missing = (form?.missing ?? []).map(({ item }) => ORDER_ITEM_WORDS[item]);
+  if (stated.length === 0 && missing.length === 0) return null;
+  return (
+    <div className="py-1">
+      {stated.length > 0 && (
+        <dl
+          aria-label={`What the order states for step ${step.seq}`}
+          className="grid grid-cols-[11rem_minmax(0,1fr)] gap-x-3 gap-y-0.5 text-second max-md:grid-cols-1"
+        >
+          {stated.map(({ id, item, says }) => (
+            <div key={id} className="contents">
+              <dt className="text-quiet first-letter:uppercase">{item}</dt>
+              <dd className="[overflow-wrap:anywhere]">{says}</dd>
+            </div>
+          ))}
+        </dl>
+      )}
+      {missing.length > 0 && (
+        <p className="text-second text-dispatched-ink">The order does not state: {missing.join('; ')}.</p>
+      )}
+    </div>
   );
 }

@@ -51,15 +51,34 @@ export function loadsOfBatch<Line extends LoadLine>(
   tables: BatchTables,
   lines: readonly Line[],
 ): LoadsOfBatch<Line> | null {
+  const known = PLANNED.get(lines);
+  // What was planned of these very lines holds these very lines.
+  if (known?.tables === tables) return known.plan as LoadsOfBatch<Line> | null;
+  const plan = planOf(tables, lines);
+  PLANNED.set(lines, { tables, plan });
+  return plan;
+}
+
+/** Several checks ask for the plan of the same lines. */
+const PLANNED = new WeakMap<
+  readonly LoadLine[],
+  { tables: BatchTables; plan: LoadsOfBatch<LoadLine> | null }
+>();
+
+function planOf<Line extends LoadLine>(
+  tables: BatchTables,
+  lines: readonly Line[],
+): LoadsOfBatch<Line> | null {
   const treated = lines.filter(({ step }) => isLoadProcess(step.process));
   if (treated.length === 0) return null;
-  const byStep = groupedBy(treated, ({ stepId }) => stepId);
-  const asked = [...byStep.values()].flatMap(([line]) => (line ? [groupOf(tables, line)] : []));
+  const kinds = new Map(treated.map((line) => [line, kindOf(line)]));
+  const byKind = groupedBy(treated, (line) => kinds.get(line) ?? '');
+  const asked = [...byKind].flatMap(([kind, [line]]) => (line ? [groupOf(tables, kind, line)] : []));
   const groups = asked.flatMap((one) => ('group' in one ? one.group : []));
   const plan = planLoads(tables.loads, groups, UNIFORMITY_C);
-  const linesOf = (keys: readonly string[]) => keys.flatMap((key) => byStep.get(key) ?? []);
+  const linesOf = (keys: readonly string[]) => keys.flatMap((key) => byKind.get(key) ?? []);
   const reasons = new Map<string, NotPlanned>([
-    ...asked.flatMap((one) => ('reason' in one ? [[one.stepId, one.reason] as const] : [])),
+    ...asked.flatMap((one) => ('reason' in one ? [[one.kind, one.reason] as const] : [])),
     ...plan.unplaced.map(({ group, reason }) => [group, reason] as const),
   ]);
   return {
@@ -74,7 +93,7 @@ export function loadsOfBatch<Line extends LoadLine>(
       between: [inOrder(lines, linesOf(one)), inOrder(lines, linesOf(other))] as const,
     })),
     unplaced: treated.flatMap((line) => {
-      const reason = reasons.get(line.stepId);
+      const reason = reasons.get(kinds.get(line) ?? '');
       return reason ? [{ line, reason }] : [];
     }),
   };
@@ -93,10 +112,17 @@ function inOrder<Line>(all: readonly Line[], some: readonly Line[]): Line[] {
   return all.filter((line) => these.has(line));
 }
 
-type Asked = { readonly group: LoadGroup } | { readonly stepId: string; readonly reason: NotPlanned };
+/** All that a plan looks at: lines of one metal, thickness and treatment are planned as one, whatever parts they are. */
+const kindOf = ({ part, step }: LoadLine): string =>
+  [
+    ...[part.alloy, part.form, part.clad, part.thicknessMm, part.madeCondition, part.endCondition],
+    ...[step.process, step.specification, step.classType, step.conditionBefore, step.targetCondition],
+  ].join('\n');
 
-function groupOf(tables: BatchTables, { stepId, part, step }: LoadLine): Asked {
-  const not = (reason: NotPlanned) => ({ stepId, reason });
+type Asked = { readonly group: LoadGroup } | { readonly kind: string; readonly reason: NotPlanned };
+
+function groupOf(tables: BatchTables, kind: string, { part, step }: LoadLine): Asked {
+  const not = (reason: NotPlanned) => ({ kind, reason });
   const found = metalOf(tables, part);
   const { process } = step;
   if (found.known !== 'yes' || !isLoadProcess(process)) return not('material_not_known');
@@ -108,7 +134,7 @@ function groupOf(tables: BatchTables, { stepId, part, step }: LoadLine): Asked {
   if (!from || !to) return not('condition_not_known');
   const { thicknessMm } = part;
   if (thicknessMm === null) return not('thickness_not_stated');
-  const group = { key: stepId, alloy, form, clad, thicknessMm, thinnestMm: thicknessMm, from, to, process };
+  const group = { key: kind, alloy, form, clad, thicknessMm, thinnestMm: thicknessMm, from, to, process };
   return { group: { ...group, ...bathOf(step) } };
 }
 

@@ -16,10 +16,7 @@ const FIRM: readonly OrderingKind[] = ['must_state', 'must_be_agreed'];
 export const statesWhatIsAsked: Check = {
   met: 'the order states what its specification asks for',
   look({ tables, batch, lines }) {
-    const answer = oncePerStep(
-      (line) => missingOf(tables, batch, line),
-      ({ stepId, characteristics }) => `${stepId}\n${characteristics.join('\n')}`,
-    );
+    const answer = oncePerStep((line) => missingOf(tables, batch, line), allThatStates);
     const same = new Map<string, { missing: readonly ChecklistItem[]; lines: CheckedLine[] }>();
     for (const line of lines) {
       const missing = answer(line);
@@ -32,6 +29,15 @@ export const statesWhatIsAsked: Check = {
     return [...same.values()].flatMap((one) => findingOf(batch, one));
   },
 };
+
+/** Lines that state the same are looked at once, whatever parts they are of. */
+const allThatStates = ({ step, part, characteristics }: CheckedLine): string =>
+  JSON.stringify([
+    ...[step.specification, step.specificationRevision, step.classType],
+    ...[step.conditionBefore, step.targetCondition, part.endCondition],
+    step.ordering,
+    characteristics,
+  ]);
 
 function missingOf(
   tables: BatchTables,

@@ -131,6 +131,10 @@ export const Part = z.object({
   height: Measure,
   mass: Measure,
   area: Measure,
+  /** Of one piece, g and mm², where sizes and stock form say a plain shape: the most it can be. */
+  computed: z
+    .object({ massG: z.number(), areaMm2: z.number(), rule: z.string(), density: z.string() })
+    .nullable(),
   serialised: z.boolean(),
   note: z.string().nullable(),
   supersededAt: Moment.nullable(),

@@ -7,11 +7,14 @@ import { assemblies, assemblyNeeds, parts, routeSteps } from '@/db/schema/parts'
 import { toPage } from '@/lib/api/paging';
 import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
+import { sourceWords } from '@/lib/batches/source-words';
 import { notFound } from '@/lib/errors';
 import { fileRefColumns } from '@/lib/files/queries';
 import { madeOfLot, placesOfLot } from '@/lib/lots/where-pieces-are';
+import { tablesOf } from '@/lib/reference/tables-of';
 import { contains, patternsOf } from '@/lib/search/patterns';
 
+import { computedMassOf, type KeptPart } from './computed-mass';
 import type { listParts as listDeclaration, PiecesAt } from './contract';
 import type { Process } from '@/lib/trade/process';
 
@@ -90,11 +93,24 @@ export async function getPart(ctx: Ctx, { partId }: { partId: string }) {
     height: measured(part.heightMm, part.heightEntered),
     mass: measured(part.massG, part.massEntered),
     area: measured(part.areaMm2, part.areaEntered),
+    computed: computedOf(ctx, part),
     drawing,
     route: await routeOf(ctx, partId),
     revisions: await revisionsOf(ctx, part.number),
     ...(await lotsOf(ctx, partId)),
     neededFor: await neededFor(ctx, part.number),
+  };
+}
+
+function computedOf(ctx: Ctx, part: KeptPart) {
+  const found = computedMassOf(tablesOf(ctx), part);
+  if (!found) return null;
+  const { massG, areaMm2, rule, density } = found;
+  return {
+    massG,
+    areaMm2,
+    rule,
+    density: `${density.gPerCm3.toFixed(3)} g/cm³, ${sourceWords(density.source)}`,
   };
 }
 
