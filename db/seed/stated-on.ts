@@ -1,4 +1,4 @@
-import { readLimit } from '@/lib/readings/limit-words';
+import { readLimit, type Limit } from '@/lib/readings/limit-words';
 
 /** Requirements that the paper answers by what it is: its order number, its signature. */
 const ANSWERED_BY_THE_PAPER = /^(order|signature)/i;
@@ -26,8 +26,17 @@ export function statedOn(
 function figureWithin(words: string, givenUnit: string): string | null {
   const limit = readLimit(words, givenUnit);
   if (!limit) return null;
-  const { scale, min, max, unit } = limit;
-  const value = min !== null && max !== null ? (min + max) / 2 : min !== null ? min * 1.06 : (max ?? 0) * 0.7;
-  const digits = value !== 0 && Math.abs(value) < 1 ? 4 : Number.isInteger(value) ? 0 : 1;
-  return [scale, value.toFixed(digits), unit].filter(Boolean).join(' ');
+  const { scale, unit } = limit;
+  const value = insideOf(limit);
+  return [scale, value.toFixed(digitsOf(value)), unit].filter(Boolean).join(' ');
+}
+
+function insideOf({ min, max }: Limit): number {
+  if (min !== null && max !== null) return (min + max) / 2;
+  return min === null ? (max ?? 0) * 0.7 : min * 1.06;
+}
+
+function digitsOf(value: number): number {
+  if (Number.isInteger(value)) return 0;
+  return Math.abs(value) < 1 ? 4 : 1;
 }

@@ -47,8 +47,10 @@ const isTemperature = ({ unit }: Limit) => /[°º]|^[FC]$/i.test(unit);
 function stepOf(limits: readonly Limit[]) {
   const setting = settingOf(limits.find(isTemperature));
   const time = limits.find((limit) => !isTemperature(limit) && /^(h|min)/i.test(limit.unit));
-  const minutes = (value: number | null) =>
-    value === null || !time ? undefined : isHours(time) ? value * 60 : value;
+  const minutes = (value: number | null) => {
+    if (value === null || !time) return undefined;
+    return isHours(time) ? value * 60 : value;
+  };
   const [least, most] = [minutes(time?.min ?? null), minutes(time?.max ?? null)];
   if (!setting && least === undefined && most === undefined) return null;
   return {

@@ -156,12 +156,17 @@ function paperProposal(
     asWellAsRead({
       requirementId: id,
       stated: [...new Set(says)].join(', '),
-      verdict: against ? 'does_not_meet' : own.length > 0 ? 'meets' : 'not_stated',
+      verdict: paperVerdict(against !== undefined, own.length > 0),
       why: against?.message ?? '',
       facts: own,
       confidence: weakest(facts, paper.decide ? placesOf(facts, paper.decide) : own),
     }),
   ];
+}
+
+function paperVerdict(isAgainst: boolean, isStated: boolean): Verdict {
+  if (isAgainst) return 'does_not_meet';
+  return isStated ? 'meets' : 'not_stated';
 }
 
 /** The facts with the lines that are of this line of the order named so; of the whole batch all are. */
