@@ -133,7 +133,7 @@ export const LABELS = {
   temperature: `temperature, temp, set temp, set temperature, set point, set pt, set, setpoint temp, soak temp,
     soak temperature, soaking temperature, soak set point, furnace temp, furnace temperature,
     furnace set, furnace set point, oven temp, oven temperature, hold temp, holding temperature,
-    process temp, process temperature, cycle temperature, temp f, temp c, deg f, deg c, f, c :,
+    process temp, process temperature, cycle temperature, temp f, temp c, deg f, deg c,
     temperatur, solltemperatur, temperatura, consigne`,
   minutes: `soak time, soak, soak duration, soak min, soak minutes, soak hrs, soak hours, soaking time,
     time at temp, time at temperature, time at heat, at temp, at temperature, min at temp,

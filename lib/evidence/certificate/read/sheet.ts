@@ -105,16 +105,23 @@ function askedOn(lines: readonly Line[], tables: readonly Table<FoundLabel>[], p
   const labelled = lines.map(({ segments }) =>
     segments.map((segment): Labelled => {
       const labels = labelsIn(segment.text);
-      return { segment, labels, isLabel: labels.some(({ whole, marked }) => whole || marked) };
+      // One letter is a revision or a unit.
+      const isLabel = segment.text.length > 1 && labels.some(({ whole, marked }) => whole || marked);
+      return { segment, labels, isLabel };
     }),
   );
   const asked: Asked[] = [];
+  const prose = new Set(
+    paragraphLines(lines).flatMap((part) => part.slice(1).map((line) => lines.indexOf(line))),
+  );
   labelled.forEach((row, index) => {
     // The cells of a table's heading have their values in the table.
     const inTable = tables.some(({ from, to }) => index >= from && index < to);
     row.forEach(({ segment, labels }, place) => {
       labels.forEach((label, turn) => {
         if (inTable && (label.whole || !label.marked)) return;
+        // In the middle of a sentence the first word of a line is no label.
+        if (prose.has(index) && !label.marked) return;
         const until = labels[turn + 1]?.start ?? segment.text.length;
         const spot = spotIn(segment, label.start, label.end);
         if (!spot) return;
@@ -237,7 +244,10 @@ function isHeading(other: Segment, line: Line, onLineOf: Segment | null): boolea
 }
 
 /** Lines that run on in the next one. A line runs on when it is a sentence's and reaches as far right as its neighbours. */
-function paragraphsOf(lines: readonly Line[]): Passage[] {
+const paragraphsOf = (lines: readonly Line[]): Passage[] =>
+  paragraphLines(lines).map((part) => joined(part.flatMap(({ segments }) => segments)));
+
+function paragraphLines(lines: readonly Line[]): Line[][] {
   const paragraphs: Line[][] = [];
   for (const line of lines) {
     const open = paragraphs[paragraphs.length - 1];
@@ -245,7 +255,7 @@ function paragraphsOf(lines: readonly Line[]): Passage[] {
     if (open && last && runsOn(last, line)) open.push(line);
     else paragraphs.push([line]);
   }
-  return paragraphs.map((part) => joined(part.flatMap(({ segments }) => segments)));
+  return paragraphs;
 }
 
 function runsOn(last: Line, line: Line): boolean {
