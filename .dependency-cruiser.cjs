@@ -29,7 +29,7 @@ module.exports = {
         pathNot: [
           '^lib/evidence/',
           'node_modules/(pdfjs-dist|tesseract[.]js|@tesseract[.]js-data|sharp|@napi-rs/canvas|mailparser|file-type)/',
-          '^(node:)?(crypto|path|url|module|worker_threads)$',
+          '^(node:)?(crypto|path|url|module|worker_threads|zlib)$',
         ],
       },
     },

@@ -43,4 +43,7 @@ export function numberIn(cell: string, decimal: Decimal): number {
 const FAULT =
   /^(?:[-*?.#_=]{2,}|[-+]?(?:inf\w*|nan|1\.#\w+)|#[\w/]+[!?]?|n\/?[ad]|null|none|invalid|bad|open|.*\b(?:open|burn ?-?out|broken|fault|fail(?:ed|ure)?|err(?:or)?|bruch|offen|ouvert|abierto|aperto|rotto|no ?tc|disc(?:onn\w*)?)\b.*|s\.? ?(?:br|break)\.?|b\.? ?out|[-+]?(?:over|under)(?: ?range)?|[-+]?o\.?l\.?|u\.?l\.?|[-+]?o\.?v(?:er|fl|r)?\.?|>+|<+|f[üu]hlerbruch|sensorbruch)$/i;
 
-export const isFault = (cell: string): boolean => cell !== '' && FAULT.test(cell);
+/** An event between the rows, which says of a door what could be said of a circuit. */
+const NO_CIRCUIT = /door|lid|valve|gate|t[üu]r|klappe|porte|puerta/i;
+
+export const isFault = (cell: string): boolean => cell !== '' && FAULT.test(cell) && !NO_CIRCUIT.test(cell);

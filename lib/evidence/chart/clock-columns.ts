@@ -2,7 +2,7 @@ import type { Column } from './columns';
 import { isCounting, isGrowing, isOfNumbers, isOfTimes } from './columns';
 import type { ChartCorrections, ElapsedUnit } from './corrections';
 import { TIME_WORD, type Heading } from './heading';
-import type { TimeShape } from './time-shape';
+import { SLOT, type TimeShape } from './time-shape';
 
 /** Which columns say when, and how. */
 export type ClockColumns =
@@ -41,7 +41,8 @@ export function clockColumnsOf(
   const time =
     written.find(({ shape }) => shape?.hasTime === true && shape.date !== null) ??
     written.find(({ at, shape }) => shape?.hasTime === true && !isElapsedHeading(headings[at])) ??
-    written.find(({ shape }) => shape?.hasTime === true);
+    written.find(({ shape }) => shape?.hasTime === true) ??
+    oddTime(candidates, headings, dates);
   if (time?.shape) {
     const date = dates.find(({ at }) => at !== time.at && (dateColumn === undefined || at === dateColumn));
     const halfDay = columns.find(
@@ -55,6 +56,33 @@ export function clockColumnsOf(
     };
   }
   return numbersClock(candidates, headings, elapsedUnit, timeColumn !== undefined);
+}
+
+/** A time of the day beside a column of dates that looks like something else: `08.15.30` like a date, `081530` a number. */
+function oddTime(
+  candidates: readonly Column[],
+  headings: readonly Heading[],
+  dates: readonly Column[],
+): Column | undefined {
+  const [date] = dates;
+  if (!date) return undefined;
+  const beside = candidates.filter(({ at }) => at !== date.at && TIME_WORD.test(headings[at]?.words ?? ''));
+  const pointed = beside.find(({ shape, shaped }) => shape?.date === 'short' && shaped > 0);
+  if (pointed?.shape) {
+    const template = ['h', 'm', 's'].reduce(
+      (text, letter, slot) => text.replace(`<${slot}`, `<${letter}`),
+      pointed.shape.template,
+    );
+    const slots = [SLOT.hour, SLOT.minute, SLOT.second60];
+    return { ...pointed, shape: { slots, date: null, hasTime: true, halfDays: false, template } };
+  }
+  const joined = beside.find(
+    ({ values }) =>
+      values.length > 1 &&
+      values.every((value) => value < 240_000 && value % 100 < 60 && Math.trunc(value / 100) % 100 < 60),
+  );
+  const shape = { slots: [SLOT.compactTime], date: null, hasTime: true, halfDays: false, template: 'HHmmss' };
+  return joined && { ...joined, shape };
 }
 
 export const isElapsedHeading = (heading: Heading | undefined): boolean =>

@@ -67,14 +67,17 @@ export const isOfTimes = (column: Column): boolean =>
 export const isOfNumbers = (column: Column): boolean =>
   column.filled > 0 && column.numbers > 0 && column.numbers + column.faults >= column.filled * 0.6;
 
-/** Whether the numbers only grow. */
-export const isGrowing = ({ values }: Column): boolean =>
-  values.length >= 2 &&
-  values.every((value, at) => at === 0 || value >= (values[at - 1] ?? value)) &&
-  (values[values.length - 1] ?? 0) > (values[0] ?? 0);
+/** Whether the numbers grow, but for a few where a clock was set or a page begins anew. */
+export function isGrowing({ values }: Column): boolean {
+  const falls = values.filter((value, at) => at > 0 && value < (values[at - 1] ?? value)).length;
+  return (
+    values.length >= 2 && falls <= values.length * 0.02 && (values[values.length - 1] ?? 0) > (values[0] ?? 0)
+  );
+}
 
-/** Whole numbers one after the other: the number of the row. */
-export const isCounting = ({ values }: Column): boolean =>
+/** Whole numbers one after the other, from the beginning or in the first column: the number of the row. */
+export const isCounting = ({ at, values }: Column): boolean =>
   values.length >= 3 &&
-  values.filter((value, at) => at > 0 && value - (values[at - 1] ?? value) === 1).length >=
+  (at === 0 || values[0] === 0 || values[0] === 1) &&
+  values.filter((value, row) => row > 0 && value - (values[row - 1] ?? value) === 1).length >=
     (values.length - 1) * 0.9;

@@ -28,7 +28,16 @@ export function findingsOf(seen: Seen): Findings {
   return { fails: of('fails'), doubts: of('doubts'), holds: of('holds'), remarks: of('remarks') };
 }
 
-function soakFindings({ recording, requirement, examined, band, soak, soakS, gaps }: Seen): Finding[] {
+function soakFindings({
+  recording,
+  requirement,
+  examined,
+  band,
+  soak,
+  soakS,
+  gaps,
+  ownGaps,
+}: Seen): Finding[] {
   const { set, tolerance, unit, soakMinutes, soakMinutesMax } = requirement;
   const lower = `${set - tolerance} °${unit}`;
   if (!examined.some(isCounted)) return [['doubts', 'No thermocouple is left to judge by.']];
@@ -55,9 +64,11 @@ function soakFindings({ recording, requirement, examined, band, soak, soakS, gap
     const open = soakMinutesMax !== undefined && soakS / 60 <= soakMinutesMax;
     findings.push([open ? 'doubts' : 'remarks', 'The chart ends before the soak does.']);
   }
-  for (const gap of gaps.filter(({ from, to }) => to > soak.from && from < soak.to)) {
-    const long = durationWords((recording.seconds[gap.to] ?? 0) - (recording.seconds[gap.from] ?? 0));
-    findings.push(['doubts', `Nothing was recorded for ${long} from ${at(gap.from)}, inside the soak.`]);
+  const all = [...gaps.map((run) => ({ channel: null, run })), ...ownGaps];
+  for (const { channel, run } of all.filter((one) => one.run.to > soak.from && one.run.from < soak.to)) {
+    const long = durationWords((recording.seconds[run.to] ?? 0) - (recording.seconds[run.from] ?? 0));
+    const what = channel === null ? 'Nothing was recorded' : `${channel} has no reading`;
+    findings.push(['doubts', `${what} for ${long} from ${at(run.from)}, inside the soak.`]);
   }
   const again = band.later.find(({ from, to }) => isLong(recording.seconds, from, to));
   if (again && !longer)
@@ -107,7 +118,10 @@ function overshootFindings({
 function quenchFindings({ requirement, quench, quenchDelayS }: Seen): Finding[] {
   const allowed = requirement.maxQuenchDelayS;
   if (allowed === undefined) return [];
-  if (quenchDelayS === null) return [['doubts', 'The chart shows no quench, so its delay cannot be told.']];
+  if (quenchDelayS === null) {
+    const shown = quench ? 'the plunge into the quench but not the transfer to it' : 'no quench';
+    return [['doubts', `The chart shows ${shown}, so its delay cannot be told.`]];
+  }
   const says = `From the first fall to the plunge it took ${durationWords(quenchDelayS)}; ${allowed} s were allowed.`;
   const step = quench?.delayS === quenchDelayS ? quench.stepS : 0;
   // Rows further apart than what is allowed cannot show that it was kept.

@@ -21,13 +21,17 @@ interface Setting {
   readonly soak: Soak | null;
 }
 
-export const gapFlags = ({ recording }: Setting, gaps: readonly Run[]): ChartFlag[] =>
-  gaps.slice(0, MOST).map(({ from, to }) => ({
+/** @param gaps with the thermocouple that has no reading, null where the recorder wrote nothing at all. */
+export const gapFlags = (
+  { recording }: Setting,
+  gaps: readonly { channel: string | null; run: Run }[],
+): ChartFlag[] =>
+  gaps.slice(0, MOST).map(({ channel, run: { from, to } }) => ({
     code: 'gap',
-    channel: null,
+    channel,
     from: momentOf(recording, from),
     to: momentOf(recording, to),
-    message: `Nothing was recorded for ${durationWords(lengthOf(recording, from, to))}.`,
+    message: `${channel === null ? 'Nothing was recorded' : `${channel} has no reading`} for ${durationWords(lengthOf(recording, from, to))}.`,
   }));
 
 /** What is wrong with the thermocouples themselves. */

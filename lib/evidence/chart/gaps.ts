@@ -57,3 +57,22 @@ function emptyRuns(seconds: Float64Array, counted: readonly Float64Array[], usua
     .map(({ from, to }) => ({ from: Math.max(0, from - 1), to: Math.min(seconds.length - 1, to) }))
     .filter(({ from, to }) => (seconds[to] ?? 0) - (seconds[from] ?? 0) > Math.max(usual * STEPS, MOMENT_S));
 }
+
+/**
+ * Where one thermocouple has no reading although the recorder went on, up to the end of the chart. One that is written
+ * in every other row only has none.
+ *
+ * @returns runs whose `from` is its last reading before and whose `to` is the first one after it.
+ */
+export function readingGaps(seconds: Float64Array, values: Float64Array): Run[] {
+  const empty = runsWhere(values.length, (row) => Number.isNaN(values[row])).filter(({ from }) => from > 0);
+  if (empty.length === 0) return [];
+  const [usual, first] = [usualStep(seconds) ?? 0, values.findIndex((value) => !Number.isNaN(value))];
+  // Mostly empty columns were written less often, not lost.
+  const filled = values.length - empty.reduce((sum, { from, to }) => sum + to - from, 0);
+  const own = usual * Math.max(1, Math.round(values.length / Math.max(1, filled)));
+  return empty
+    .filter(({ from }) => from > first)
+    .map(({ from, to }) => ({ from: from - 1, to: Math.min(to, values.length - 1) }))
+    .filter(({ from, to }) => (seconds[to] ?? 0) - (seconds[from] ?? 0) > Math.max(own * STEPS, MOMENT_S));
+}

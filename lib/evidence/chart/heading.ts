@@ -78,6 +78,7 @@ function alignedCells(line: string, delimiter: Delimiter, width: number): readon
 function isHeading(cells: readonly string[], width: number, decimal: Decimal): boolean {
   const filled = cells.filter((cell) => cell !== '');
   const words = filled.filter((cell) => !isNumber(cell, decimal) && timeShapeOf(cell) === null);
+  if (isUnits(cells)) return true;
   if (filled.length <= width * 0.5 || filled.length < 2) return false;
   return words.length >= filled.length * 0.5 || (TIME_WORD.test(words[0] ?? '') && words[0] === cells[0]);
 }

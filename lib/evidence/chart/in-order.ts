@@ -67,13 +67,19 @@ function spread(seconds: Float64Array): boolean {
   for (let row = 1; row < seconds.length; row++) if (seconds[row] === seconds[row - 1]) same++;
   if (same < seconds.length * 0.3) return false;
   const resolution = seconds.every((second) => second % 60 === 0) ? 60 : 1;
-  let most = 1;
-  eachRun(seconds, (from, to) => (most = Math.max(most, to - from)));
-  const step = resolution / most;
+  const lengths: number[] = [];
+  eachRun(seconds, (from, to) => lengths.push(to - from));
+  let run = 0;
   eachRun(seconds, (from, to) => {
-    // The first one may have begun within its minute.
-    const late = from === 0 ? most - (to - from) : 0;
-    for (let row = from; row < to; row++) seconds[row] = (seconds[row] ?? 0) + (row - from + late) * step;
+    // The first minute and the last one may be cut; there the rows stand as close as in the minute beside it.
+    const [isFirst, isLast] = [run === 0, run === lengths.length - 1];
+    const own = lengths[run] ?? 1;
+    const full = Math.max(own, isFirst ? (lengths[1] ?? own) : 0, isLast ? (lengths[run - 1] ?? own) : 0);
+    const late = isFirst ? full - own : 0;
+    for (let row = from; row < to; row++) {
+      seconds[row] = (seconds[row] ?? 0) + ((row - from + late) * resolution) / full;
+    }
+    run++;
   });
   return true;
 }

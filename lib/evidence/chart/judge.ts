@@ -1,6 +1,6 @@
 import { faultFlags, gapFlags, lateFlags, overshootFlags } from './flags';
 import { furtherFacts } from './further-facts';
-import { gapsOf } from './gaps';
+import { gapsOf, readingGaps } from './gaps';
 import { findingsOf, type Findings } from './findings';
 import type { ChartFlag, JudgedChart } from './judged-chart';
 import { degreesIn } from './limits';
@@ -21,6 +21,8 @@ export interface Seen {
   readonly band: BandOverTime;
   readonly soak: Soak | null;
   readonly gaps: readonly Run[];
+  /** Where single ones of the counted have no reading while the others have. */
+  readonly ownGaps: readonly { readonly channel: string; readonly run: Run }[];
   readonly quench: Quench | null;
   /** As a remark of the recorder says it, before what the temperatures show. */
   readonly quenchDelayS: number | null;
@@ -37,30 +39,36 @@ export function seenIn(recording: Recording, requirement: ChartRequirement): See
   const { seconds } = recording;
   const band = bandOverTime(seconds.length, counted);
   const { soak } = band;
-  const quench = soak && quenchAfter(seconds, counted, [soak, ...band.later]);
+  const gaps = gapsOf(
+    seconds,
+    counted.map(({ values }) => values),
+  );
+  const furnace = examined
+    .filter(
+      ({ channel, isCandidate, excluded }) => channel.role === 'control' && !isCandidate && excluded === null,
+    )
+    .map(({ values }) => values);
+  const quench = soak && quenchAfter(seconds, counted, { windows: [soak, ...band.later], furnace });
   return {
     recording,
     requirement,
     examined,
     band,
     soak,
-    gaps: gapsOf(
-      seconds,
-      counted.map(({ values }) => values),
+    gaps,
+    ownGaps: counted.flatMap(({ channel }) =>
+      readingGaps(seconds, channel.values)
+        .filter((run) => !gaps.some(({ from, to }) => from <= run.from && to >= run.to))
+        .map((run) => ({ channel: channel.name, run })),
     ),
     quench,
-    quenchDelayS: statedDelay(recording) ?? visibleDelay(quench),
+    quenchDelayS:
+      statedDelay(recording) ?? (quench?.delayS == null ? null : Math.round(quench.delayS * 10) / 10),
     hottest: hottestOf(counted, requirement),
     soakS: soak ? (seconds[soak.to] ?? 0) - (seconds[soak.from] ?? 0) : 0,
     secondsAbove: secondsWhere(seconds, band.isAbove),
   };
 }
-
-/** A fall and a plunge within one long step of the recorder show no delay. */
-const COARSEST_S = 60;
-
-const visibleDelay = (quench: Quench | null): number | null =>
-  quench && (quench.delayS > 0 || quench.stepS <= COARSEST_S) ? Math.round(quench.delayS * 10) / 10 : null;
 
 function hottestOf(counted: readonly Examined[], { unit }: ChartRequirement): Seen['hottest'] {
   let [row, degrees] = [-1, Number.NEGATIVE_INFINITY];
@@ -137,7 +145,7 @@ function understoodOf({ recording, examined }: Seen): JudgedChart['understood'] 
 }
 
 function flagsOf(seen: Seen): ChartFlag[] {
-  const { recording, requirement, examined, soak, gaps, soakS } = seen;
+  const { recording, requirement, examined, soak, gaps, ownGaps, soakS } = seen;
   const asked = requirement.soakMinutes;
   const isShort = asked !== undefined && soakS / 60 < asked && examined.some(isCounted);
   const short: ChartFlag[] = isShort
@@ -154,7 +162,7 @@ function flagsOf(seen: Seen): ChartFlag[] {
   return [
     ...short,
     ...examined.filter(isCounted).flatMap((one) => overshootFlags(seen, one)),
-    ...gapFlags(seen, gaps),
+    ...gapFlags(seen, [...gaps.map((run) => ({ channel: null, run })), ...ownGaps]),
     ...examined.flatMap((one) => faultFlags(seen, one)),
     ...lateFlags(seen, examined),
   ];

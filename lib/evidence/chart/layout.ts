@@ -40,7 +40,7 @@ export function layoutOf(sample: SampleLines, corrections: ChartCorrections): La
   const isRow = (line: string) => isRowOf(cellsOf(line, delimiter), width, decimal);
   const first = sample.head.findIndex(isRow);
   if (first < 0) return null;
-  const above = sample.head.slice(0, first);
+  const above = withoutBreaksInQuotes(sample.head.slice(0, first));
   const { headings, lines } = headingsOf(above, dialect);
   const rows = [...sample.head.slice(first, first + ROWS_SEEN), ...sample.further]
     .filter(isRow)
@@ -57,6 +57,19 @@ export function layoutOf(sample: SampleLines, corrections: ChartCorrections): La
   if (values.length === 0) return null;
   const preamble = above.slice(0, Math.max(0, above.length - lines));
   return { delimiter, decimal, clock, clockHeading: headings[clockColumn(clock)], values, preamble };
+}
+
+/** A quoted heading may go on in the next line. */
+function withoutBreaksInQuotes(lines: readonly string[]): readonly string[] {
+  const whole: string[] = [];
+  let open = false;
+  for (const line of lines) {
+    if (open) whole[whole.length - 1] = `${whole[whole.length - 1] ?? ''} ${line}`;
+    else whole.push(line);
+    if ((line.split('"').length - 1) % 2 === 1) open = !open;
+  }
+  // A quote that is never closed was none.
+  return open ? lines : whole;
 }
 
 const clockColumn = (clock: ClockColumns): number =>

@@ -7,7 +7,8 @@ import type { CountedChannel, Soak } from './soak';
 export interface Quench {
   readonly fallsFrom: number;
   readonly plungesFrom: number;
-  readonly delayS: number;
+  /** Where the fall is the plunge: the length of that step, since the transfer took at most as long. Null where that is too short for any transfer, so that the thermocouples did not show it. */
+  readonly delayS: number | null;
   /** Seconds between the rows there: the delay is known no better than that. */
   readonly stepS: number;
 }
@@ -19,24 +20,30 @@ const PLUNGE_RATE = 2.5;
 const PLUNGE_DEPTH = 120;
 /** It begins where the fall reaches this share of its steepest rate; a transfer through air is far slower. */
 const SHARE_OF_STEEPEST = 0.25;
+/** A fall and a plunge within one longer step of the recorder show no delay at all. */
+const COARSEST_S = 60;
+/** Nobody moves a load from a furnace into a tank in less. */
+const QUICKEST_S = 3;
 /** Rows and seconds before the plunge in which the beginning of the fall is looked for. */
 const [WINDOW_ROWS, WINDOW_S] = [90, 420];
 
 /**
  * Finds the quench behind a soak and its delay. The door opens for all at once, so the fall begins at the median of what
- * the thermocouples show; the delay ends when the last of them plunges.
+ * the thermocouples show, or where the furnace's own begin to fall before; the delay ends when the last of them plunges.
  *
+ * @param furnace readings of thermocouples that are not counted and stay in the furnace.
  * @param windows the soak and, where the load came back into the band, what followed.
  * @returns null where the chart shows no quench: slow cooling, or an end before it.
  */
 export function quenchAfter(
   seconds: Float64Array,
   counted: readonly CountedChannel[],
-  windows: readonly Soak[],
+  { windows, furnace }: { windows: readonly Soak[]; furnace: readonly Float64Array[] },
 ): Quench | null {
   for (const [at, window] of windows.entries()) {
     // A load that falls out of the band and comes back was not quenched between.
-    const found = window.ended ? quenchBehind(seconds, counted, window, windows[at + 1]?.from) : null;
+    const before = windows[at + 1]?.from ?? seconds.length;
+    const found = window.ended ? quenchBehind(seconds, counted, { soak: window, before, furnace }) : null;
     if (found) return found;
   }
   return null;
@@ -45,25 +52,24 @@ export function quenchAfter(
 function quenchBehind(
   seconds: Float64Array,
   counted: readonly CountedChannel[],
-  soak: Soak,
-  nextFrom = seconds.length,
+  { soak, before, furnace }: { soak: Soak; before: number; furnace: readonly Float64Array[] },
 ): Quench | null {
   const plunges = counted
-    .map(({ values }) => ({ values, row: plungeRow(seconds, values, soak, nextFrom) }))
+    .map(({ values }) => ({ values, row: plungeRow(seconds, values, soak, before) }))
     .filter(({ row }) => row >= 0);
   if (plunges.length === 0 || plunges.length * 2 <= counted.length) return null;
   const falls = plunges
     .map(({ values, row }) => fallRow(seconds, values, row, soak.from))
     .toSorted((one, other) => one - other);
   const plungesFrom = Math.max(...plunges.map(({ row }) => row));
-  const fallsFrom = Math.min(falls[Math.floor((falls.length - 1) / 2)] ?? plungesFrom, plungesFrom);
+  const ofLoad = falls[Math.floor((falls.length - 1) / 2)] ?? plungesFrom;
+  const ofFurnace = furnace.map((values) => fallRow(seconds, values, plungesFrom, soak.from));
+  const fallsFrom = Math.min(ofLoad, plungesFrom, ...ofFurnace);
   const at = (row: number) => seconds[row] ?? 0;
-  return {
-    fallsFrom,
-    plungesFrom,
-    delayS: at(plungesFrom) - at(fallsFrom),
-    stepS: at(Math.min(plungesFrom + 1, seconds.length - 1)) - at(plungesFrom),
-  };
+  const stepS = at(Math.min(plungesFrom + 1, seconds.length - 1)) - at(plungesFrom);
+  const seenS = at(plungesFrom) - at(fallsFrom);
+  const withinS = stepS >= QUICKEST_S && stepS <= COARSEST_S ? stepS : null;
+  return { fallsFrom, plungesFrom, delayS: seenS > 0 ? seenS : withinS, stepS };
 }
 
 /** The last row before the steep fall, -1 where there is none. */

@@ -6,13 +6,14 @@ import type { ChartCorrections } from './corrections';
 import { temperatureUnitIn } from './heading';
 import { bringInOrder } from './in-order';
 import type { ChannelRole } from './judged-chart';
+import { likelyUnit } from './likely-unit';
 import { degreesIn } from './limits';
 import { layoutOf, type Layout } from './layout';
 import { plainBytes } from './plain-bytes';
 import type { ChartRequirement, TemperatureUnit } from './requirement';
 import { sampleLines } from './sample-lines';
 import { scanRows, type ScannedRows } from './scan-rows';
-import { likelyUnit } from './likely-unit';
+import { widened } from './widened';
 
 export interface Channel {
   /** In the file, from 0. */
@@ -57,7 +58,8 @@ export function recordingOf(
   requirement: ChartRequirement,
   corrections: ChartCorrections = {},
 ): Recording {
-  const plain = plainBytes(file);
+  const written = plainBytes(file);
+  const plain = widened(written, sampleLines(written), corrections) ?? written;
   const layout = layoutOf(sampleLines(plain), corrections);
   const scanned = layout && scanRows(plain, layout);
   if (!layout || !scanned || scanned.rows < 2) {
@@ -96,9 +98,7 @@ function channelsOf(
     return {
       column,
       name: said?.name ?? name,
-      role:
-        said?.role ??
-        (isUnnamedSetPoint(name, values, requirement) ? 'set_point' : channelRole(words || name)),
+      role: said?.role ?? roleOf(name, words, values, requirement),
       said: temperatureUnitIn(words),
       step: 10 ** -(scanned.scales[index] ?? 0),
       values,
@@ -130,16 +130,25 @@ function channelsOf(
   return { channels, unit, notes, doubts };
 }
 
-/** A column that says nothing of itself and stands at the set temperature from the first row to the last. */
-const isUnnamedSetPoint = (
+const THERMOCOUPLE = /\bt[ce]\b|\bt[ce]?[\s_#-]*\d|\bch\w*[\s_#-]*\d|thermo|couple|temp/i;
+
+/** By its heading; but a column that stands still from the first row to the last is the number of a load, or a set point. */
+function roleOf(
   name: string,
+  words: string,
   values: Float64Array,
   { set, tolerance, unit }: ChartRequirement,
-): boolean =>
-  !/\bt[ce]\b|\bt[ce]?[\s_#-]*\d|thermo|couple|load|part/i.test(name) &&
-  values.length > 10 &&
-  values.every((value) => value === values[0]) &&
-  (['F', 'C'] as const).some((own) => Math.abs(degreesIn(values[0] ?? 0, own, unit) - set) <= tolerance / 2);
+): ChannelRole {
+  const [first = 0] = values;
+  const role = channelRole(words || name);
+  const still = values.length > 10 && values.every((value) => value === first);
+  if (!still || role === 'set_point' || (words !== '' && THERMOCOUPLE.test(name))) return role;
+  const near = (['F', 'C'] as const).some(
+    (own) => Math.abs(degreesIn(first, own, unit) - set) <= tolerance / 2,
+  );
+  if (near) return 'set_point';
+  return Number.isInteger(first) ? 'other' : role;
+}
 
 /** The unit in the lines before the table, where they name only one. */
 function statedUnit(preamble: readonly string[]): TemperatureUnit | null {

@@ -42,6 +42,7 @@ export class RowScanner {
     this.decimalSign = decimal;
     this.decimal = decimal === '.' ? POINT : COMMA;
     this.group = decimal === '.' ? COMMA : POINT;
+    this.groups[SLOT.compactTime] = -1;
   }
 
   /** Whether the line is over. */

@@ -13,8 +13,9 @@ const WINDOWS = 8;
 /** The lines from which the dialect is told, whatever the size of the file. */
 export function sampleLines({ bytes, textOf }: PlainBytes): SampleLines {
   const cut = (from: number, to: number) => textOf(from, Math.min(to, bytes.length)).split(/\r\n|\n|\r/);
+  // A window must not fall into the head or into the one before it: the rows must stay in their order.
+  if (bytes.length <= 2 * HEAD) return { head: cut(0, bytes.length), further: [] };
   const head = cut(0, HEAD);
-  if (bytes.length <= HEAD) return { head, further: [] };
   head.pop();
   const further: string[] = [];
   for (let at = 1; at <= WINDOWS; at++) {

@@ -20,10 +20,11 @@ function letters(date: NonNullable<TimeShape['date']>, order: DateOrder): readon
 
 /** A word in a time is half of a day, a weekday or a month. */
 const wordsAsLetters = (template: string): string =>
-  template
-    .replace(/(?<![a-z])[ap]\.?\s?m\.?(?![a-z])/i, 'A')
-    .replace(/\p{L}{3,}\.?/gu, (word) =>
-      /^(?:mon|tue|wed|thu|fri|sat|sun)/i.test(word) ? 'ddd' : monthLetters(word),
-    );
+  template.replace(/(?<![a-z])[ap]\.?\s?m\.?(?![a-z])/i, 'A').replace(/\p{L}{3,}\.?/gu, wordLetters);
 
-const monthLetters = (word: string): string => (word.length > 4 ? 'MMMM' : 'MMM');
+function wordLetters(word: string): string {
+  // Compact times come as letters already.
+  if (/^(?:YYYYMMDD|HHmmss)$/.test(word)) return word;
+  if (/^(?:mon|tue|wed|thu|fri|sat|sun)/i.test(word)) return 'ddd';
+  return word.length > 4 ? 'MMMM' : 'MMM';
+}

@@ -18,7 +18,7 @@ export function secondsIn(groups: Float64Array, afternoon: number): number {
 
 const compactTime = (groups: Float64Array): number => {
   if ((groups[SLOT.compact] ?? 0) > 0) return (groups[SLOT.compact] ?? 0) % 1_000_000;
-  return (groups[SLOT.compactDate] ?? 0) > 0 ? (groups[SLOT.compactTime] ?? 0) : -1;
+  return groups[SLOT.compactTime] ?? -1;
 };
 
 /** The three groups of a date as 10,000, 100 and 1. */

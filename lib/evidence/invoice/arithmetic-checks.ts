@@ -52,8 +52,9 @@ function totalOutcome(stated: StatedInvoice): InvoiceDiscrepancy[] {
       0,
     ) + chargesOf(stated);
   const says = minorOf(total);
-  // A line that is multiplied wrongly is told by itself.
-  if (says === sum || says === multiplied) return [];
+  const withRightTax = taxesByRate(stated).map((tax) => sum - minorOf(stated.tax ?? 0) + tax);
+  // A line that is multiplied wrongly and a tax that is not its rate are told by themselves.
+  if ([sum, multiplied, ...withRightTax].includes(says)) return [];
   return [
     {
       code: 'arithmetic',
@@ -66,6 +67,20 @@ function totalOutcome(stated: StatedInvoice): InvoiceDiscrepancy[] {
 export function chargesTaxAsStated(stated: StatedInvoice): InvoiceDiscrepancy[] {
   const { tax, tax_rate: rate } = stated;
   if (tax === null || rate === null) return [];
+  const asked = minorOf(tax);
+  const right = taxesByRate(stated);
+  if (right.some((one) => Math.abs(one - asked) <= 1)) return [];
+  return [
+    {
+      code: 'tax_mismatch',
+      message: `${sayMinor(asked)} is charged as tax; ${rate} % of what is charged is ${sayMinor(Math.max(...right))}.`,
+    },
+  ];
+}
+
+function taxesByRate(stated: StatedInvoice): number[] {
+  const rate = stated.tax_rate;
+  if (rate === null) return [];
   const work = sumMinor([...stated.lines.map(({ amount }) => amount), stated.lot_minimum_adjustment]);
   const fees = sumMinor([stated.certification_fee, ...stated.other_charges.map(({ amount }) => amount)]);
   const freight = sumMinor([stated.freight]);
@@ -73,13 +88,5 @@ export function chargesTaxAsStated(stated: StatedInvoice): InvoiceDiscrepancy[] 
     ...[work, work + fees, work + freight, work + fees + freight],
     ...(stated.subtotal === null ? [] : [minorOf(stated.subtotal)]),
   ];
-  const asked = minorOf(tax);
-  if (bases.some((base) => Math.abs(Math.round((base * rate) / 100) - asked) <= 1)) return [];
-  const all = work + fees + freight;
-  return [
-    {
-      code: 'tax_mismatch',
-      message: `${sayMinor(asked)} is charged as tax; ${rate} % of ${sayMinor(all)} is ${sayMinor(Math.round((all * rate) / 100))}.`,
-    },
-  ];
+  return bases.map((base) => Math.round((base * rate) / 100));
 }

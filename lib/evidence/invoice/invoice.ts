@@ -62,7 +62,6 @@ export const INVOICE_CODES = [
   'currency_mismatch',
   'not_on_order',
 ] as const;
-export type InvoiceCode = (typeof INVOICE_CODES)[number];
 
 export const InvoiceDiscrepancy = z.object({ code: z.enum(INVOICE_CODES), message: z.string() });
 export type InvoiceDiscrepancy = z.output<typeof InvoiceDiscrepancy>;

@@ -115,6 +115,12 @@ interface Sent {
   readonly seen: readonly SeenInvoice[];
 }
 
+/** A line of this invoice or of an earlier one, of which less may be known. */
+interface Invoiced {
+  readonly part_number?: string | null | undefined;
+  readonly qty?: number | null | undefined;
+}
+
 /** No more pieces than were accepted, those of earlier invoices counted; where nothing is said, than were ordered. */
 export function invoicesAcceptedPieces(
   { lines }: StatedInvoice,
@@ -125,7 +131,7 @@ export function invoicesAcceptedPieces(
     .filter(({ purchase_order }) => !!purchase_order && namesOrder(purchase_order, order.po))
     .flatMap((one) => one.lines ?? []);
   return numbers.flatMap((number): InvoiceDiscrepancy[] => {
-    const pieces = (all: readonly Partial<InvoiceLine>[]) =>
+    const pieces = (all: readonly Invoiced[]) =>
       all.filter((line) => belongsTo(line, number, order)).reduce((sum, { qty }) => sum + (qty ?? 0), 0);
     const most = accepted
       ? countOf(
@@ -149,7 +155,7 @@ export function invoicesAcceptedPieces(
 }
 
 /** A line without a part number is of the only part ordered. */
-const belongsTo = ({ part_number }: Partial<InvoiceLine>, number: string, { lines }: Order): boolean =>
+const belongsTo = ({ part_number }: Invoiced, number: string, { lines }: Order): boolean =>
   part_number == null
     ? new Set(lines.map((line) => line.part_number)).size === 1
     : isPart(part_number, number);

@@ -34,6 +34,8 @@ export async function within<T>(
 ): Promise<T> {
   const timeout = AbortSignal.timeout(milliseconds);
   const stop = signal ? AbortSignal.any([timeout, signal]) : timeout;
+  // What goes on after nobody waits any more may fail unheard.
+  work.catch(() => undefined);
   if (stop.aborted) throw tookTooLong();
   return new Promise<T>((resolve, reject) => {
     const onAbort = () => reject(tookTooLong());

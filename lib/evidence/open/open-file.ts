@@ -47,6 +47,8 @@ export async function openFile(bytes: Uint8Array, options: OpenOptions): Promise
       pages: pages.map((page, i) => ({ ...page, number: i + 1 })),
     };
   } catch (cause) {
+    // Whatever the recogniser is still busy with must not hold up the next file.
+    if (cause instanceof UnreadableFile && cause.code === 'took_too_long') await recogniser.close();
     if (cause instanceof UnreadableFile) throw cause;
     throw new UnreadableFile('damaged', 'This file is damaged and cannot be read. Please ask for it again.');
   } finally {

@@ -3,12 +3,12 @@ import type { Component } from './picture/find-components';
 import { toGrey, type Coloured } from './picture/colours';
 import { findSheet, type Corners } from './picture/find-sheet';
 import { findStamps } from './picture/find-stamps';
-import type { Grey, PixelBox } from './picture/grey';
+import type { Grey, Ink, PixelBox } from './picture/grey';
 import { levelLight } from './picture/level-light';
-import { chainProjections, SAME_PLACE, type Projection } from './picture/projection';
+import { chainProjections, quarterTurn, SAME_PLACE, type Projection } from './picture/projection';
 import { rectify } from './picture/rectify';
 import { shrink } from './picture/shrink';
-import { straighten, type Straightened } from './picture/straighten';
+import { straighten, turnFurther, type Straightened } from './picture/straighten';
 import { boxThroughProjection } from './box';
 
 /** A page's picture as it comes out of a file. `dpi` is null where the file does not say. */
@@ -29,6 +29,7 @@ export interface Prepared {
   /** Text alone. */
   readonly text: Grey;
   readonly rules: readonly PixelBox[];
+  readonly ink: Ink;
   readonly components: readonly Component[];
   readonly stamps: readonly PixelBox[];
   readonly hands: readonly PixelBox[];
@@ -64,11 +65,12 @@ export function preparePage(source: PagePicture): Prepared {
   };
 }
 
-/** The same page after its straightened picture was turned over. */
-export function prepareAgain(page: Prepared, straight: Straightened): Prepared {
-  const { width, height } = straight.picture;
-  const over = (boxes: readonly PixelBox[]) =>
-    boxes.map(([l, t, r, b]): PixelBox => [width - r, height - b, width - l, height - t]);
+/** The same page, its straightened picture turned further. */
+export function turnPrepared(page: Prepared, degrees: 90 | 180): Prepared {
+  const straight = turnFurther(page.straight, degrees);
+  const { width, height } = page.straight.picture;
+  const turn = quarterTurn(degrees, width, height);
+  const over = (boxes: readonly PixelBox[]) => boxes.map((box) => boxThroughProjection(turn, box));
   return {
     ...page,
     straight,
@@ -79,8 +81,8 @@ export function prepareAgain(page: Prepared, straight: Straightened): Prepared {
 }
 
 function cleaned({ picture }: Straightened, dpi: number) {
-  const { picture: text, rules, components } = cleanPage(picture, dpi);
-  return { text, rules, components };
+  const { picture: text, rules, ink, components } = cleanPage(picture, dpi);
+  return { text, rules, ink, components };
 }
 
 const onPage = (boxes: readonly PixelBox[] | undefined, projection: Projection) =>

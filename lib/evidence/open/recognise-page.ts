@@ -1,32 +1,37 @@
 import type { AsFiled, Mark, Page, Word } from '../page';
 import { shareWithin } from './box';
+import type { Component } from './picture/find-components';
 import { findStrokes } from './picture/find-strokes';
 import type { PixelBox } from './picture/grey';
 import { chainProjections, inverseOf, quarterTurn, scaling } from './picture/projection';
-import { overturn } from './picture/straighten';
-import { prepareAgain, type Prepared } from './prepare-page';
+import { lookAgain } from './picture/second-look';
+import { turnPrepared, type Prepared } from './prepare-page';
 import type { RecognisedWord, Recogniser } from './recogniser';
-import { resize } from './resize';
+import { READING_DPI, resize } from './resize';
 
-/** Below this the letters of small print are too few pixels high. */
-const LEAST_DPI = 190;
-const GOOD_DPI = 250;
 /** Words of a page that stands on its head are rubbish, and the recogniser knows. */
 const RUBBISH = 0.6;
+const FEWEST_LETTERS = 20;
 /** A word this doubtful under a stroke is the stroke misread. */
 const DOUBTFUL = 0.7;
 
-/** Recognises a prepared page; turns it over and tries again where nothing sensible comes out. */
+/** Recognises a prepared page; turns it and tries again where nothing sensible comes out. */
 export async function recognisePage(prepared: Prepared, recogniser: Recogniser): Promise<Page> {
-  const first = await read(prepared, recogniser);
-  if (meanConfidence(first) >= RUBBISH || prepared.components.length < 20) return assemble(prepared, first);
-  const over = prepareAgain(prepared, overturn(prepared.straight));
-  const second = await read(over, recogniser);
-  return meanConfidence(second) > meanConfidence(first) ? assemble(over, second) : assemble(prepared, first);
+  let page = prepared;
+  let best = { page, words: await read(page, recogniser) };
+  if (prepared.components.length < FEWEST_LETTERS) return assemble(best.page, best.words);
+  for (const further of [180, 90, 180] as const) {
+    if (meanConfidence(best.words) >= RUBBISH) break;
+    page = turnPrepared(page, further);
+    const words = await read(page, recogniser);
+    if (meanConfidence(words) > meanConfidence(best.words)) best = { page, words };
+  }
+  return assemble(best.page, best.words);
 }
 
 async function read(page: Prepared, recogniser: Recogniser): Promise<RecognisedWord[]> {
-  const scale = page.dpi < LEAST_DPI ? GOOD_DPI / page.dpi : 1;
+  const wanted = READING_DPI / page.dpi;
+  const scale = Math.abs(wanted - 1) < 0.05 ? 1 : wanted;
   const picture = scale === 1 ? page.text : await resize(page.text, scale);
   const words = await recogniser.read(picture, { dpi: page.dpi * scale });
   return scale === 1
@@ -49,9 +54,11 @@ function assemble(page: Prepared, recognised: readonly RecognisedWord[]): Page {
   const points = 72 / dpi;
   const toPoints = (box: PixelBox): PixelBox => box.map((edge) => edge * points) as unknown as PixelBox;
   const sure = recognised.filter(({ confidence }) => confidence >= DOUBTFUL).map(({ box }) => box);
+  const componentsAt = byRows(page.components);
   const strokes = [...findStrokes(page.components, [...sure, ...page.stamps], dpi), ...page.hands];
   const words = recognised
     .filter(isWord)
+    .map((word) => ({ ...word, text: lookAgain(word.text, word.box, componentsAt(word.box), page.ink) }))
     .filter(
       ({ box, confidence }) =>
         confidence >= DOUBTFUL || !strokes.some((stroke) => shareWithin(box, stroke) > 0.6),
@@ -69,6 +76,25 @@ function assemble(page: Prepared, recognised: readonly RecognisedWord[]): Page {
     words: words.map(({ text, box, confidence }): Word => ({ text, box: toPoints(box), confidence })),
     marks: [...marks('rule', page.rules), ...marks('stroke', strokes), ...marks('picture', page.stamps)],
     hidden: [],
+  };
+}
+
+const ROW = 64;
+
+/** The components near a box, looked up by the rows they stand in. */
+function byRows(components: readonly Component[]): (box: PixelBox) => Component[] {
+  const rows = new Map<number, Component[]>();
+  for (const component of components) {
+    const row = Math.floor((component.box[1] + component.box[3]) / 2 / ROW);
+    const list = rows.get(row);
+    if (list) list.push(component);
+    else rows.set(row, [component]);
+  }
+  return (box) => {
+    const found: Component[] = [];
+    for (let row = Math.floor(box[1] / ROW); row <= Math.floor(box[3] / ROW); row++)
+      found.push(...(rows.get(row) ?? []));
+    return found;
   };
 }
 

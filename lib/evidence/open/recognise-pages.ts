@@ -2,6 +2,7 @@ import type { Page } from '../page';
 import { within, type Limits } from './limits';
 import { preparePage, type PagePicture } from './prepare-page';
 import { recognisePage } from './recognise-page';
+import { coarsen } from './resize';
 import type { Recogniser } from './recogniser';
 
 /**
@@ -17,7 +18,9 @@ export async function recognisePages(
   let photograph = false;
   let reading: Promise<Page> | null = null;
   for (const picture of pictures) {
-    const prepared = preparePage(await within(limits.millisecondsPerPage, limits.signal, picture()));
+    const prepared = preparePage(
+      await within(limits.millisecondsPerPage, limits.signal, picture().then(coarsen)),
+    );
     photograph ||= prepared.photograph;
     if (reading) pages.push(await reading);
     reading = within(limits.millisecondsPerPage, limits.signal, recognisePage(prepared, recogniser));

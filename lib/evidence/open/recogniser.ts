@@ -13,7 +13,7 @@ export interface RecognisedWord {
 /** Reads letters from pictures. One may serve many pages, one after the other; it holds a thread until it is closed. */
 export interface Recogniser {
   read(picture: Grey, options: { dpi: number; oneLine?: boolean }): Promise<RecognisedWord[]>;
-  /** Stops what it is doing, for good. */
+  /** Stops what it is doing and ends its thread; another read would start a new one. */
   close(): Promise<void>;
 }
 

@@ -61,7 +61,8 @@ export async function bytesOf(file: string): Promise<{ bytes: Uint8Array; name: 
   const bytes = await readFile(file).catch(() => {
     throw new InputError('file_not_found', `${file} cannot be opened.`);
   });
-  return { bytes, name: basename(file) };
+  // A plain array: readers of formats refuse Node's own kind.
+  return { bytes: new Uint8Array(bytes), name: basename(file) };
 }
 
 /**

@@ -10,7 +10,11 @@ import { fileURLToPath } from 'node:url';
 
 import Papa from 'papaparse';
 
+import { extremesOf } from '@/lib/evidence/chart/extremes';
 import { readChart } from '@/lib/evidence/chart/read-chart';
+import { recordingOf } from '@/lib/evidence/chart/recording';
+import { reduced } from '@/lib/evidence/chart/reduced';
+import { timeSpan } from '@/lib/evidence/chart/spans';
 
 import { longChart } from './long-chart';
 
@@ -32,6 +36,25 @@ function measured(work: Work, path: string): { seconds: number; megabytes: numbe
   });
   if (stdout === '') throw new Error(stderr);
   return JSON.parse(stdout) as { seconds: number; megabytes: number };
+}
+
+/** What a zoom costs before the canvas is painted: from the whole run to a few rows, in a thousand steps. */
+function measureRedraws(bytes: Uint8Array): void {
+  const recording = recordingOf(bytes, REQUIREMENT);
+  const begun = performance.now();
+  const extremes = recording.channels.map(({ values }) => extremesOf(values));
+  console.log(`extremes of all channels ${(performance.now() - begun).toFixed(0)} ms, once`);
+  const { from, to } = timeSpan(recording);
+  const times = Array.from({ length: 1000 }, (_, step) => {
+    const half = ((to - from) / 2) * 0.99 ** step;
+    const middle = from + (to - from) * (0.3 + (0.4 * step) / 1000);
+    const before = performance.now();
+    reduced(recording.seconds, extremes, { from: middle - half, to: middle + half, columns: 1200 });
+    return performance.now() - before;
+  }).toSorted((one, other) => one - other);
+  console.log(
+    `a redraw ${times[500]?.toFixed(2) ?? ''} ms in the middle, ${times[990]?.toFixed(2) ?? ''} ms at the 99th of a hundred (a frame has 16.7)`,
+  );
 }
 
 const [, , work, path] = process.argv;
@@ -58,6 +81,7 @@ if (work !== undefined && path !== undefined) {
     }
   }
   rmSync(folder, { recursive: true });
+  measureRedraws(bytes);
   const middle = (times: readonly number[]) =>
     times.toSorted((a, b) => a - b)[Math.floor(times.length / 2)] ?? 0;
   console.log(

@@ -56,14 +56,13 @@ interface Grid {
 const between = (
   grid: Grid,
   load: number,
-  from: number,
-  to: number,
+  [from, to]: readonly [number, number],
   give: (value: number, row: number) => number | 'open',
 ) => {
   const values = grid.loads[load] ?? [];
   for (let row = grid.rowAt(from); row < grid.rowAt(to); row++) {
     const value = values[row];
-    if (typeof value === 'number') values[row] = give(value, row);
+    if (typeof value === 'number') values[row] = rounded(give(value, row));
   }
 };
 const dropRows = (grid: Grid, from: number, to: number) => {
@@ -85,20 +84,20 @@ const PLANS: readonly Plan[] = [
     verdict: 'fail',
     soakMin: 50,
     flags: ['short_soak'],
-    change: (grid, { from }) => between(grid, 1, from + 900, from + 960, (value) => value - 16),
+    change: (grid, { from }) => between(grid, 1, [from + 900, from + 960], (value) => value - 16),
   },
   {
     name: 'one cooler row ends the soak',
     verdict: 'fail',
     soakMin: 50,
     flags: ['short_soak'],
-    change: (grid, { from }) => between(grid, 1, from + 900, from + 910, (value) => value - 14),
+    change: (grid, { from }) => between(grid, 1, [from + 900, from + 910], (value) => value - 14),
   },
   {
     name: 'overshoot',
     verdict: 'fail',
     flags: ['overshoot'],
-    change: (grid, { from }) => between(grid, 0, from + 300, from + 480, (value) => value + 15),
+    change: (grid, { from }) => between(grid, 0, [from + 300, from + 480], (value) => value + 15),
   },
   {
     name: 'a gap in the soak',
@@ -117,34 +116,34 @@ const PLANS: readonly Plan[] = [
     verdict: 'pass',
     flags: ['open_circuit'],
     excluded: ['TC2'],
-    change: (grid) => between(grid, 1, 0, 1e6, () => 'open'),
+    change: (grid) => between(grid, 1, [0, 1e6], () => 'open'),
   },
   {
     name: 'open circuit in the soak',
     verdict: 'pass',
     flags: ['open_circuit'],
     excluded: ['TC2'],
-    change: (grid, { from }) => between(grid, 1, from + 700, 1e6, () => 'open'),
+    change: (grid, { from }) => between(grid, 1, [from + 700, 1e6], () => 'open'),
   },
   {
     name: 'open circuit in the quench',
     verdict: 'pass',
     flags: ['open_circuit'],
-    change: (grid, { to }) => between(grid, 2, to + 20, 1e6, () => 'open'),
+    change: (grid, { to }) => between(grid, 2, [to + 20, 1e6], () => 'open'),
   },
   {
     name: 'dead from the start',
     verdict: 'pass',
     flags: ['flat_line'],
     excluded: ['TC2'],
-    change: (grid) => between(grid, 1, 0, 1e6, () => 71.3),
+    change: (grid) => between(grid, 1, [0, 1e6], () => 71.3),
   },
   {
     name: 'stands still from the soak on',
     verdict: 'review',
     flags: ['flat_line'],
     excluded: ['TC2'],
-    change: (grid, { from }) => between(grid, 1, from + 400, 1e6, () => 919.4),
+    change: (grid, { from }) => between(grid, 1, [from + 400, 1e6], () => 919.4),
   },
   {
     name: 'late thermocouple',
@@ -155,8 +154,7 @@ const PLANS: readonly Plan[] = [
       between(
         grid,
         2,
-        0,
-        from + 900,
+        [0, from + 900],
         (value, row) => value - 60 * Math.min(1, (from + 900 - (grid.seconds[row] ?? 0)) / 900),
       ),
   },
@@ -164,7 +162,7 @@ const PLANS: readonly Plan[] = [
     name: 'a spike in the soak',
     verdict: 'review',
     flags: ['spike'],
-    change: (grid, { from }) => between(grid, 0, from + 500, from + 510, () => 1322.5),
+    change: (grid, { from }) => between(grid, 0, [from + 500, from + 510], () => 1322.5),
   },
   { name: 'a slow quench', verdict: 'fail', delayS: 22 },
 ];
@@ -251,6 +249,7 @@ function soakByTheRule(
 
 const steps = (from: number, to: number, step: number): number[] =>
   Array.from({ length: Math.ceil((to - from) / step) }, (_, at) => from + at * step);
+const rounded = (value: number | 'open'): number | 'open' => (value === 'open' ? value : tenth(value));
 const tenth = (value: number): number => Math.round(value * 10) / 10;
 
 function randomOf(seed: number): () => number {

@@ -2,19 +2,24 @@ import type { StatedCertificate } from '../certificate';
 import type { Check } from './compared';
 import { soakOutcomes, temperatureOutcomes } from './cycle-checks';
 import { minutesBetween } from './duration';
-import { meets, notStated, wrong, type Outcome } from './outcome';
+import { cannotTell, meets, notStated, wrong, type Outcome } from './outcome';
+import { speaksOf } from './on-the-page';
 import { sideOf } from './range';
 import { sayDuration, sayMinute } from './say';
+
+const NAMES = /^\W*(?:bak(?:e|ed|ing)|embrittlement|h\.?e\.?r|entspr|degazage|dégazage)/i;
 
 const isBake = ({ step }: { step: string }) => step === 'embrittlement_relief' || step === 'bake';
 
 /** Parts that plating may have embrittled were baked: soon enough, hot enough, as long as they must be. */
-export const isBaked: Check = ({ stated, order }) => {
+export const isBaked: Check = ({ stated, order, pages }) => {
   const { bake } = order.requirements;
   if (!bake) return [];
   const cycles = bakesOf(stated);
   const least = bake.min_hours === undefined ? '' : ` ${bake.min_hours} h`;
   const asked = { requirement: `bake${least} after plating`, ordered: `bake${least}` };
+  if (cycles.length === 0 && speaksOf(NAMES, [bake.set_f, bake.min_hours ?? NaN], pages))
+    return [cannotTell(asked, 'The page speaks of a bake that could not be read.')];
   if (cycles.length === 0)
     return [
       wrong(

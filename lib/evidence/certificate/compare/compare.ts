@@ -94,7 +94,15 @@ export function compare({
   const match = matchOrder(stated, open, { isRecognised: file.recognised });
   const order = given ?? match.matched;
   const compared =
-    order && comparedWith(order, { stated, orders, others, seen, isRecognised: file.recognised });
+    order &&
+    comparedWith(order, {
+      stated,
+      orders,
+      others,
+      seen,
+      pages: pagesOf(stated, file),
+      isRecognised: file.recognised,
+    });
   // What follows from the order says nothing of a certificate that is for another one.
   const own = compared?.isOfOtherOrder ? null : order;
   const outcomes = [
@@ -120,7 +128,13 @@ function withoutOrder(candidates: readonly Order[]): string[] {
   ];
 }
 
-type Sides = Pick<Compared, 'stated' | 'orders' | 'others' | 'seen' | 'isRecognised'>;
+type Sides = Pick<Compared, 'stated' | 'orders' | 'others' | 'seen' | 'pages' | 'isRecognised'>;
+
+/** Those that something of this certificate was read on; a file may hold several. */
+function pagesOf({ facts }: StatedCertificate, { pages }: Pick<OpenedFile, 'pages'>): OpenedFile['pages'] {
+  const own = new Set(facts.map(({ page }) => page));
+  return own.size === 0 ? pages : pages.filter(({ number }) => own.has(number));
+}
 
 function comparedWith(order: Order, sides: Sides): Compared {
   const { stated, others, isRecognised } = sides;

@@ -1,4 +1,5 @@
 import type { Order } from '../../order';
+import type { Page } from '../../page';
 import type { SeenCertificate, StatedCertificate } from '../certificate';
 import type { Outcome } from './outcome';
 import type { PairedLines } from './pair-lines';
@@ -12,6 +13,8 @@ export interface Compared {
   readonly others: readonly StatedCertificate[];
   readonly seen: readonly SeenCertificate[];
   readonly isRecognised: boolean;
+  /** Of the file that the certificate stands on. */
+  readonly pages: readonly Page[];
   readonly pairs: PairedLines;
   /** The order's number is another one, and no part number of this order stands on the certificate. */
   readonly isOfOtherOrder: boolean;

@@ -5,6 +5,7 @@ import type { Cycle } from '../certificate';
 import type { Check } from './compared';
 import { contradictsItself, durationOf, saidMinutes } from './duration';
 import { cannotTell, doubtful, meets, notStated, wrong, type DiscrepancyCode, type Outcome } from './outcome';
+import { speaksOf } from './on-the-page';
 import { sideOf } from './range';
 import { sayDuration, sayRange, type Range } from './say';
 import { judgeTemperature, saySetting, type Setting } from './temperature';
@@ -127,8 +128,10 @@ export function soakOutcomes(
   });
 }
 
+const AGEING = /^\W*(?:age|aged|age?ing|auslager|vieilli|maturation)/i;
+
 /** Ageing was done, of the kind ordered and as long as it must be. */
-export const isAged: Check = ({ stated, order }) => {
+export const isAged: Check = ({ stated, order, pages }) => {
   const { age } = order.requirements;
   if (!age) return [];
   const limit = sayRange({ min: age.min_hours, max: age.max_hours }, (value) => `${value} h`);
@@ -148,6 +151,9 @@ export const isAged: Check = ({ stated, order }) => {
         `The order asks for ${name}, the certificate states ${other.step.replace('_age', ' ageing')}.`,
       ),
     ];
+  const numbers = [age.min_hours ?? NaN, age.set_f ?? NaN];
+  if (speaksOf(AGEING, numbers, pages))
+    return [cannotTell(asked, 'The page speaks of ageing that could not be read.')];
   // A certificate that lists no furnace step at all is silent; one that lists the others leaves this one out.
   if (stated.cycles.length === 0) return [notStated(asked)];
   return [

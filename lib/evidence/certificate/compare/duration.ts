@@ -14,16 +14,22 @@ export interface Duration {
   readonly words: string;
 }
 
+/** Minutes that are so many times what the times say are misread, not miscounted. */
+const MISREAD = 5;
+
 export function durationOf({
   minutes,
   soak_start,
   soak_end,
 }: Omit<Cycle, 'step' | 'set_temp' | 'unit'>): Duration {
-  const byTimes = soak_start !== null && soak_end !== null ? minutesBetween(soak_start, soak_end) : null;
-  const times =
-    soak_start !== null && soak_end !== null ? `${sayMinute(soak_start)} to ${sayMinute(soak_end)}` : '';
-  const parts = [minutes === null ? '' : sayDuration(minutes), times].filter((part) => part !== '');
-  return { stated: minutes, byTimes, words: parts.join(', ') };
+  // One time for start and end is one that stands for both.
+  const hasTimes = soak_start !== null && soak_end !== null && soak_start !== soak_end;
+  const byTimes = hasTimes ? minutesBetween(soak_start, soak_end) : null;
+  const isMisread = minutes !== null && byTimes !== null && byTimes > 0 && minutes >= MISREAD * byTimes;
+  const stated = isMisread ? null : minutes;
+  const times = hasTimes ? `${sayMinute(soak_start)} to ${sayMinute(soak_end)}` : '';
+  const parts = [stated === null ? '' : sayDuration(stated), times].filter((part) => part !== '');
+  return { stated, byTimes, words: parts.join(', ') };
 }
 
 /** Both ways of saying it that are there, the shorter first. */

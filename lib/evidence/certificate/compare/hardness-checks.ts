@@ -6,26 +6,27 @@ import { convertHardness, type HardnessQuestion } from '@/lib/trade/hardness/con
 import { readEachList } from '@/lib/trade/hardness/read-each-list';
 
 import type { Order } from '../../order';
-import type { Reading, StatedCertificate } from '../certificate';
-import type { Check } from './compared';
+import type { Reading } from '../certificate';
+import type { Check, Compared } from './compared';
 import { cannotTell, doubtful, meets, notStated, wrong, type Outcome } from './outcome';
 import { sideOf } from './range';
 import { conductivityUnit, hardnessName, hardnessScale } from './reading-units';
+import { readingsOf } from './readings-of';
 import { sayList, sayNumber, sayRange } from './say';
 import { TABLES } from './tables';
 import { alloyIn, saysClad, tempersIn } from './tempers-in';
 
-const readingsOf = ({ readings }: StatedCertificate): Reading[] =>
-  readings.filter(({ kind, values }) => /^hardness/.test(kind) && values.length > 0);
+const HARDNESS = /^hardness/;
 
 /** Hardness within its limits; another scale is converted where a table allows, and proves nothing. */
-export const isHardEnough: Check = ({ stated, order }) => {
+export const isHardEnough: Check = (compared) => {
+  const { order } = compared;
   const { hardness } = order.requirements;
   if (!hardness) return [];
   const scale = hardnessName(hardness.scale);
   const ordered = `${sayRange(hardness, sayNumber)} ${scale}`;
   const asked = { requirement: `hardness ${ordered}`, ordered };
-  const readings = readingsOf(stated);
+  const readings = readingsOf(compared, HARDNESS);
   if (readings.length === 0) return [notStated(asked)];
   const own = readings.filter(({ unit }) => unit !== null && hardnessName(unit) === scale);
   // Where it was read in the scale asked for, that decides.
@@ -106,7 +107,8 @@ function convertedOutcome(
  * Hardness and conductivity together are those of the condition ordered, by the published pair. What the order limits
  * itself is judged by the order; clad metal has no published pair.
  */
-export const readsAsItsCondition: Check = ({ stated, order }) => {
+export const readsAsItsCondition: Check = (compared) => {
+  const { order } = compared;
   const { requirements, lines } = order;
   const alloy = alloyOf(order);
   const condition = tempersIn(requirements.temper_out ?? '').at(-1);
@@ -116,8 +118,8 @@ export const readsAsItsCondition: Check = ({ stated, order }) => {
   if (!alloy || !condition || (requirements.hardness && requirements.conductivity_pct_iacs)) return [];
   const asked = { alloy, condition, isClad };
   const band = acceptanceOf(TABLES.acceptance, asked);
-  const hardnesses = hardnessesOf(stated);
-  const conductivities = conductivitiesOf(stated);
+  const hardnesses = hardnessesOf(compared);
+  const conductivities = conductivitiesOf(compared);
   // Only the pair speaks.
   if (!band.ok || hardnesses.length === 0 || conductivities.length === 0) return [];
   const judged = hardnesses.flatMap((hardness) =>
@@ -147,17 +149,15 @@ export const readsAsItsCondition: Check = ({ stated, order }) => {
   ];
 };
 
-const hardnessesOf = (stated: StatedCertificate) =>
-  readingsOf(stated).flatMap(({ unit, values }) => {
+const hardnessesOf = (compared: Compared) =>
+  readingsOf(compared, HARDNESS).flatMap(({ unit, values }) => {
     const scale = unit === null ? null : hardnessScale(unit);
     return scale === null ? [] : values.map((value) => ({ scale, value }));
   });
 
-const conductivitiesOf = ({ readings }: StatedCertificate): number[] =>
-  readings
-    .filter(({ kind }) => /^conductivity/.test(kind))
-    .flatMap(({ unit, values }) => {
-      const known = unit === null ? null : conductivityUnit(unit);
-      if (known === null) return [];
-      return known === 'MS/m' ? values.map(iacsFromMsPerM) : values;
-    });
+const conductivitiesOf = (compared: Compared): number[] =>
+  readingsOf(compared, /^conductivity/).flatMap(({ unit, values }) => {
+    const known = unit === null ? null : conductivityUnit(unit);
+    if (known === null) return [];
+    return known === 'MS/m' ? values.map(iacsFromMsPerM) : values;
+  });

@@ -3,18 +3,30 @@ import type { CertificateLine } from '../certificate';
 import { likeness, lookalikeKey, plainKey } from '../match/alike';
 import { namesOrder } from '../match/same-order-number';
 import type { Check, Compared } from './compared';
-import { doubtful, meets, notStated, observed, wrong, type Outcome } from './outcome';
-import type { LinePair, StatedLine } from './pair-lines';
+import { cannotTell, doubtful, meets, notStated, observed, wrong, type Outcome } from './outcome';
+import { isOnThePage, transposedOnThePage } from './on-the-page';
+import { piecesOf, type LinePair, type StatedLine } from './pair-lines';
 
 /** Each ordered part is on the certificate under its number, and nothing else is. */
 export const showsEachPart: Check = (compared) => {
   const { pairs, unknown } = compared.pairs;
-  if (compared.stated.lines.length === 0) return [noPartsListed(compared)];
+  // What was taken for a part number may be any other number where a line was not read as what it is.
+  const unread = pairs.filter((pair) => isUnread(pair, compared)).length;
+  const parts = pairs.flatMap((pair) => partOutcome(pair, compared));
+  const areAllMissing = parts.every((part) => part.wrong?.code === 'part_number_missing');
   return [
-    ...pairs.flatMap((pair) => partOutcome(pair, compared)),
-    ...unknown.map((line) => unknownPart(line, compared)),
+    ...(compared.stated.lines.length === 0 && areAllMissing ? [noPartsListed(compared)] : parts),
+    // A number without pieces, revision or lot certifies nothing; mostly it is no part.
+    ...unknown
+      .filter((line) => piecesOf(line) !== null || line.rev !== null || line.lot !== null)
+      .slice(unread)
+      .map((line) => unknownPart(line, compared)),
   ];
 };
+
+/** The ordered number stands on the page, and no line was read with it. */
+const isUnread = ({ ordered, stated }: LinePair, { pages }: Compared): boolean =>
+  !stated.some(({ by }) => by === 'same' || by === 'lookalike') && isOnThePage(ordered.part_number, pages);
 
 function noPartsListed({ order: { lines } }: Compared): Outcome {
   const [only] = lines;
@@ -30,15 +42,22 @@ function noPartsListed({ order: { lines } }: Compared): Outcome {
   );
 }
 
-function partOutcome({ ordered, stated }: LinePair, { others, isRecognised }: Compared): Outcome[] {
+function partOutcome(pair: LinePair, compared: Compared): Outcome[] {
+  const { ordered, stated } = pair;
+  const { others, isRecognised } = compared;
   const asked = {
     requirement: `part number ${ordered.part_number}`,
     line: ordered.line,
     ordered: ordered.part_number,
   };
+  if (isUnread(pair, compared))
+    return [cannotTell(asked, `${ordered.part_number} stands on the page, but its line could not be read.`)];
   if (stated.length > 0) return stated.slice(0, 1).map((line) => namedPart(ordered, line, isRecognised));
   const isElsewhere = others.some(({ lines }) => lines.some((line) => isSamePart(line, ordered)));
   if (isElsewhere) return [meets(asked, 'It stands on another certificate of this order.')];
+  const numbers = compared.order.lines.map(({ part_number }) => part_number);
+  const transposed = transposedOnThePage(ordered.part_number, numbers, compared.pages);
+  if (transposed !== null) return [transposedPart({ ...asked, stated: transposed })];
   return [
     wrong(
       'part_number_missing',
@@ -50,6 +69,18 @@ function partOutcome({ ordered, stated }: LinePair, { others, isRecognised }: Co
 
 const isSamePart = ({ part_number }: CertificateLine, ordered: OrderLine): boolean =>
   part_number !== null && plainKey(part_number) === plainKey(ordered.part_number);
+
+const transposedPart = (asked: {
+  requirement: string;
+  line: number;
+  ordered: string;
+  stated: string | null;
+}) =>
+  wrong(
+    'part_number_transposed',
+    asked,
+    `The certificate says ${asked.stated}, the order ${asked.ordered}: two characters changed places.`,
+  );
 
 function namedPart(ordered: OrderLine, { line, by }: StatedLine, isRecognised: boolean): Outcome {
   const asked = {
@@ -67,11 +98,7 @@ function namedPart(ordered: OrderLine, { line, by }: StatedLine, isRecognised: b
         `${line.part_number} differs from ${ordered.part_number} only in characters that look alike.`,
       );
     case 'transposed':
-      return wrong(
-        'part_number_transposed',
-        asked,
-        `The certificate says ${line.part_number}, the order ${ordered.part_number}: two characters changed places.`,
-      );
+      return transposedPart(asked);
     case 'near':
     case 'only_one_left':
       return wrong(
@@ -137,7 +164,11 @@ function revisionOutcome(ordered: OrderLine, stated: readonly StatedLine[], isRe
   const [first] = written;
   if (first === undefined) return [notStated(asked)];
   const key = revisionKey(ordered.rev);
-  const other = written.find((rev) => !isSameKey(revisionKey(rev), key, isRecognised));
+  const other = written.find((rev) => {
+    const given = revisionKey(rev);
+    // A letter alone in its cell is easily recognised twice.
+    return !isSameKey(given, key, isRecognised) && !(isRecognised && given === key + key);
+  });
   if (other === undefined) return [meets({ ...asked, stated: first }, 'It is the revision ordered.')];
   return [
     wrong(

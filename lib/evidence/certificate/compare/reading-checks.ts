@@ -2,11 +2,12 @@ import { iacsFromMsPerM } from '@/lib/trade/acceptance/conductivity';
 import { ksiFromMpa } from '@/lib/trade/units/stress';
 import { z } from 'zod';
 
-import type { Reading, StatedCertificate } from '../certificate';
+import type { Reading } from '../certificate';
 import type { Check } from './compared';
 import { cannotTell, doubtful, meets, notStated, wrong, type DiscrepancyCode, type Outcome } from './outcome';
 import { halfOfLastPlace, sideOf } from './range';
 import { conductivityUnit, lengthUnit, stressUnit } from './reading-units';
+import { readingsOf } from './readings-of';
 import { sayList, sayNumber, sayRange, type Range } from './say';
 
 interface Limit {
@@ -21,14 +22,11 @@ interface Limit {
   readonly mayBe: readonly string[];
 }
 
-const ofKind = ({ readings }: StatedCertificate, kind: RegExp): Reading[] =>
-  readings.filter((reading) => kind.test(reading.kind) && reading.values.length > 0);
-
 /** Conductivity within its limits, in % IACS or MS/m. */
-export const conducts: Check = ({ stated, order }) => {
-  const range = order.requirements.conductivity_pct_iacs;
+export const conducts: Check = (compared) => {
+  const range = compared.order.requirements.conductivity_pct_iacs;
   if (!range) return [];
-  return judgeReadings(ofKind(stated, /^conductivity/), {
+  return judgeReadings(readingsOf(compared, /^conductivity/), {
     name: 'conductivity',
     range,
     unit: '% IACS',
@@ -45,11 +43,11 @@ export const conducts: Check = ({ stated, order }) => {
 };
 
 /** A coating neither too thin nor too thick, in any unit. */
-export const isThickEnough: Check = ({ stated, order }) => {
-  const range = order.requirements.thickness;
+export const isThickEnough: Check = (compared) => {
+  const range = compared.order.requirements.thickness;
   if (!range) return [];
   const asked = lengthUnit(range.unit);
-  return judgeReadings(ofKind(stated, /thickness/), {
+  return judgeReadings(readingsOf(compared, /thickness/), {
     name: 'coating thickness',
     range,
     unit: asked?.says ?? range.unit,
@@ -73,7 +71,8 @@ const Tensile = z.looseObject({
 });
 
 /** Tensile strength, where an order asks for it, in ksi, psi or MPa. */
-export const isStrongEnough: Check = ({ stated, order: { requirements } }) => {
+export const isStrongEnough: Check = (compared) => {
+  const { requirements } = compared.order;
   const asked = Tensile.safeParse(requirements['tensile_ksi'] ?? requirements['tensile']);
   if (!asked.success) return [];
   const inKsi = (value: number, printed: string) => {
@@ -85,7 +84,7 @@ export const isStrongEnough: Check = ({ stated, order: { requirements } }) => {
   const unit = asked.data.unit ?? 'ksi';
   const limit = (value: number | null | undefined) =>
     value == null ? null : (inKsi(value, unit)?.value ?? null);
-  return judgeReadings(ofKind(stated, /^tensile/), {
+  return judgeReadings(readingsOf(compared, /^tensile/), {
     name: 'tensile strength',
     range: { min: limit(asked.data.min), max: limit(asked.data.max) },
     unit: 'ksi',

@@ -1,5 +1,6 @@
-/** At most two decimals, none that say nothing: 493.33, 38. */
-export const sayNumber = (value: number): string => String(Math.round(value * 100) / 100);
+/** At most two decimals, below 1 three figures, none that say nothing: 493.33, 38, 0.00035. */
+export const sayNumber = (value: number): string =>
+  String(Math.abs(value) < 1 ? Number(value.toPrecision(3)) : Math.round(value * 100) / 100);
 
 const HOURS_FROM_MINUTES = 180;
 

@@ -19,7 +19,7 @@ export async function openDocument(
 ): Promise<PDFDocumentProxy> {
   const task = getDocument({
     // pdf.js takes the bytes over, so it is given its own.
-    data: bytes.slice(),
+    data: new Uint8Array(bytes),
     ...(password === undefined ? {} : { password }),
     verbosity: VerbosityLevel.ERRORS,
     isEvalSupported: false,

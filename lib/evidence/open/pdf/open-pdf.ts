@@ -7,7 +7,8 @@ import { quarterTurn } from '../picture/projection';
 import { preparePage, type Prepared } from '../prepare-page';
 import { recognisePage } from '../recognise-page';
 import type { Recogniser } from '../recogniser';
-import { refuseBrokenPdf } from './check-pdf';
+import { coarsen } from '../resize';
+import { refuseHarmfulPdf } from './check-pdf';
 import { asUnreadable, openDocument } from './open-document';
 import { pictureOfPage, shareCovered } from './page-picture';
 import { readPage, type DescribedPage, type Layers } from './read-page';
@@ -31,7 +32,7 @@ export async function openPdf(
   bytes: Uint8Array,
   { password, limits, recogniser }: Tools & { password?: string | undefined },
 ): Promise<Opened> {
-  refuseBrokenPdf(bytes);
+  refuseHarmfulPdf(bytes, limits);
   const document = await openDocument(bytes, { password, limits });
   try {
     return await openPages(document, { limits, recogniser });
@@ -77,9 +78,8 @@ function isTextToTrust({ page, drawn, readable }: DescribedPage): boolean {
 
 async function prepare(proxy: PDFPageProxy, described: DescribedPage, limits: Limits): Promise<Prepared> {
   const { drawn, box } = described.describeUnturned();
-  return preparePage(
-    await within(limits.millisecondsPerPage, limits.signal, pictureOfPage(proxy, drawn, box)),
-  );
+  const picture = pictureOfPage(proxy, drawn, box).then(coarsen);
+  return preparePage(await within(limits.millisecondsPerPage, limits.signal, picture));
 }
 
 async function read(

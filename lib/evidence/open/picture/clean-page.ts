@@ -9,7 +9,8 @@ export interface CleanPage {
   /** Text alone, dark on white: no rules, no dark areas, no dust. */
   readonly picture: Grey;
   readonly rules: readonly PixelBox[];
-  /** Pieces of ink that are left. */
+  /** The ink that is left when the rules are off, and its pieces. */
+  readonly ink: Ink;
   readonly components: readonly Component[];
 }
 
@@ -25,10 +26,11 @@ export function cleanPage(page: Grey, dpi: number): CleanPage {
     rules = findRules(ink, dpi);
   }
   wipeInk(picture, rules.ink, ink);
-  const components = findComponents(inkWithout(ink, rules.ink));
+  const left = inkWithout(ink, rules.ink);
+  const components = findComponents(left);
   const specks = findSpecks(components, dpi);
   for (const { box } of specks) wipeBox(picture, [box[0] - 1, box[1] - 1, box[2] + 1, box[3] + 1]);
-  return { picture, rules: rules.lines, components };
+  return { picture, rules: rules.lines, ink: left, components };
 }
 
 function inkWithout({ width, height, data }: Ink, taken: Ink): Ink {

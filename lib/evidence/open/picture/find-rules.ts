@@ -20,7 +20,7 @@ const GAP = 2;
 const ENOUGH = { ink: 0.82, thin: 0.62 };
 /** A line shorter than this could be the bar of a word in large type, and must be spotless. */
 const SHORT = 0.65;
-const SPOTLESS = { ink: 0.96, thin: 0.92 };
+const SPOTLESS = { ink: 0.96, thin: 0.85 };
 
 /**
  * Finds the rules of a straightened page.

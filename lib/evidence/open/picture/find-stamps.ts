@@ -13,12 +13,13 @@ export interface Stamps {
 
 /** Difference between the strongest and the weakest of red, green and blue that makes an ink coloured. */
 const COLOURED = 42;
+/** Below this strongest colour an ink is black to the eye, or the dark ground of a heading. */
 const BLACK = 110;
 /** Pixels to a cell of the coarse map. */
 const CELL = 4;
 /** In inches. */
 const NARROWEST = 0.6;
-const LOWEST = 0.28;
+const LOWEST = 0.42;
 const REACH = 0.05;
 /** Of its cells, the share that must touch black print for a stamp to count as lying over it. */
 const OVER_PRINT = 0.02;
@@ -79,8 +80,8 @@ function coarseMap({ width, height, data }: Coloured): CoarseMap {
           const at = ((y * CELL + k) * width + x * CELL + j) * 3;
           const [r, g, b] = [data[at] as number, data[at + 1] as number, data[at + 2] as number];
           const most = Math.max(r, g, b);
-          if (most - Math.min(r, g, b) > COLOURED) tinted++;
-          else if (most < BLACK) dark++;
+          if (most < BLACK) dark++;
+          else if (most - Math.min(r, g, b) > COLOURED) tinted++;
         }
       }
       if (tinted >= 3) {
@@ -144,7 +145,7 @@ function takeOff({ width, data }: Coloured, grey: Grey, [left, top, right, botto
         const at = (y * width + x) * 3;
         const [r, g, b] = [data[at] as number, data[at + 1] as number, data[at + 2] as number];
         const most = Math.max(r, g, b);
-        if (most - Math.min(r, g, b) > COLOURED / 2) work(y * width + x, most);
+        if (most >= BLACK && most - Math.min(r, g, b) > COLOURED / 2) work(y * width + x, most);
       }
     }
   };

@@ -11,14 +11,16 @@ export function guessUpsideDown(components: readonly Component[], dpi: number): 
       ({ box }) =>
         box[3] - box[1] > 0.035 * dpi && box[3] - box[1] < 0.3 * dpi && box[2] - box[0] < 0.4 * dpi,
     )
-    .sort((a, b) => a.box[3] - b.box[3]);
+    .sort((a, b) => middleOf(a) - middleOf(b));
+  const heights = letters.map(({ box }) => box[3] - box[1]).sort((a, b) => a - b);
+  const usual = heights[heights.length >> 1] ?? 0;
   let [rising, hanging] = [0, 0];
   for (let i = 0; i < letters.length;) {
     const line = [letters[i] as Component];
     let end = i + 1;
     for (; end < letters.length; end++) {
       const next = letters[end] as Component;
-      if (next.box[3] - (letters[end - 1] as Component).box[3] > 0.02 * dpi) break;
+      if (middleOf(next) - middleOf(letters[end - 1] as Component) > 0.3 * usual) break;
       line.push(next);
     }
     i = end;
@@ -32,3 +34,5 @@ export function guessUpsideDown(components: readonly Component[], dpi: number): 
   }
   return hanging > 2 * rising && hanging > 12;
 }
+
+const middleOf = ({ box }: Component) => (box[1] + box[3]) / 2;

@@ -17,7 +17,7 @@ const SHEETS = [
   [595, 842],
 ] as const;
 /** Enough for print of 6 points; more pixels tell nothing new. */
-const FINEST_DPI = 300;
+const FINEST_DPI = 225;
 
 /** Draws the sheet with these corners as if seen from straight above, in the nearest usual size of paper. */
 export function rectify(photograph: Grey, corners: Corners): Rectified {

@@ -39,17 +39,26 @@ export function straighten(picture: Grey, dpi: number): Straightened {
     findComponents(findInk(level.picture, inkThreshold(level.picture))),
     dpi,
   );
-  return upsideDown ? overturn(level) : level;
+  return upsideDown ? turnFurther(level, 180) : level;
 }
 
-/** The same page standing on its head. */
-export function overturn({ picture, turned, projection }: Straightened): Straightened {
-  const { width, height } = picture;
+/** The same page turned further, clockwise. */
+export function turnFurther({ picture, turned, projection }: Straightened, degrees: 90 | 180): Straightened {
   return {
-    picture: { width, height, data: picture.data.slice().reverse() },
-    turned: ((turned + 180) % 360) as Straightened['turned'],
-    projection: chainProjections(projection, quarterTurn(180, width, height)),
+    picture: degrees === 180 ? headOver(picture) : quarterOver(picture),
+    turned: ((turned + degrees) % 360) as Straightened['turned'],
+    projection: chainProjections(projection, quarterTurn(degrees, picture.width, picture.height)),
   };
+}
+
+const headOver = ({ width, height, data }: Grey): Grey => ({ width, height, data: data.slice().reverse() });
+
+function quarterOver({ width, height, data }: Grey): Grey {
+  const out = new Uint8Array(data.length);
+  for (let y = 0; y < height; y++) {
+    for (let x = 0; x < width; x++) out[x * height + (height - 1 - y)] = data[y * width + x] as number;
+  }
+  return { width: height, height: width, data: out };
 }
 
 function turnBy(picture: Grey, quarter: 0 | 90, skew: number): Straightened {

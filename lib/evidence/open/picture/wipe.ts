@@ -1,6 +1,7 @@
 import type { Grey, Ink, PixelBox } from './grey';
 
 const PAPER = 255;
+const GRAIN = 0.2;
 
 /** Paints paper over the marked ink and the grey fringe around it, in place. Ink beside it that is not marked stays. */
 export function wipeInk(picture: Grey, marked: Ink, ink: Ink): void {
@@ -39,7 +40,9 @@ export function invertBox(picture: Grey, [left, top, right, bottom]: PixelBox): 
       counts[value] = (counts[value] as number) + 1;
     }
   }
-  const ground = counts.indexOf(Math.max(...counts));
+  // The print on the ground is lighter by far; its own grain is not print.
+  const usual = counts.indexOf(Math.max(...counts));
+  const ground = usual + (PAPER - usual) * GRAIN;
   for (let y = Math.max(0, top - rim); y < Math.min(height, bottom + rim); y++) {
     for (let x = Math.max(0, left - rim); x < Math.min(width, right + rim); x++) {
       const inside = x >= left + rim && x < right - rim && y >= top + rim && y < bottom - rim;

@@ -46,6 +46,12 @@ const page = (hidden: Page['hidden'], origin: Page['origin'] = 'text_layer'): Pa
   marks: [],
   hidden,
 });
+const withWords = (...lines: string[]): Page => ({
+  ...page([]),
+  words: lines.flatMap((line) =>
+    line.split(' ').map((text) => ({ text, box: [0, 0, 1, 1] as const, confidence: 1 })),
+  ),
+});
 const HIDDEN = { text: 'Revision R', box: [0, 0, 1, 1] as const, why: 'colour' as const };
 
 type Case = [
@@ -81,6 +87,12 @@ const PLANTED: Record<string, Case[]> = {
   part_number_missing: [
     ['a line left out', HEAT, { lines: agreeing(HEAT).lines.slice(0, 1) }],
     ['no lines', HEAT, { lines: [] }],
+    [
+      'a line left out of the page',
+      HEAT,
+      { lines: agreeing(HEAT).lines.slice(0, 1) },
+      { file: { ...FILE, pages: [withWords('10-200 10-3115')] } },
+    ],
     ['a line without its number', HEAT, lines(HEAT, { part_number: null })],
   ],
   part_number_unknown: [
@@ -94,6 +106,12 @@ const PLANTED: Record<string, Case[]> = {
   ],
   part_number_transposed: [
     ['two digits', HEAT, lines(HEAT, { part_number: '10-020' })],
+    [
+      'on the page, its line not read',
+      HEAT,
+      { lines: agreeing(HEAT).lines.slice(0, 1) },
+      { file: { ...FILE, pages: [withWords('10-200 10-131,')] } },
+    ],
     ['over the dash', HEAT, lines(HEAT, { part_number: '12-000' })],
     ['in one that is not alone', HEAT, lines(HEAT, { part_number: '10-131' }, 1)],
   ],
@@ -230,6 +248,7 @@ const PLANTED: Record<string, Case[]> = {
   conductivity_out_of_range: [
     ['in % IACS', HEAT, { readings: [reading('conductivity', '%IACS', 33)] }],
     ['in MS/m', HEAT, { readings: [reading('conductivity', 'MS/m', 19.1)] }],
+    ['ten times too much, in print', HEAT, { readings: [reading('conductivity', '% IACS', 30.1, 325)] }],
     ['without a unit', HEAT, { readings: [reading('conductivity', null, 40)] }],
   ],
   readings_impossible_together: [
@@ -258,7 +277,15 @@ const PLANTED: Record<string, Case[]> = {
     ['metric', PLATE, { readings: [reading('thickness', 'µm', 7.4)] }],
     ['in inches', PLATE, { readings: [reading('thickness', 'in', 0.0002)] }],
   ],
-  bake_missing: [['', PLATE, { cycles: [], bake_start: null, bake_end: null }]],
+  bake_missing: [
+    ['', PLATE, { cycles: [], bake_start: null, bake_end: null }],
+    [
+      'said not to be done',
+      PLATE,
+      { cycles: [], bake_start: null, bake_end: null },
+      { file: { ...FILE, pages: [withWords('Bake: N/A')] } },
+    ],
+  ],
   bake_started_late: [['', PLATE, { bake_start: '2026-03-06T18:11', bake_end: '2026-03-08T18:11' }]],
   bake_too_short: [
     ['by its times', PLATE, { bake_end: '2026-03-07T14:00' }],
@@ -351,6 +378,7 @@ const RIGHT: Case[] = [
   ],
   ['a number without its dash', HEAT, lines(HEAT, { part_number: '10200' })],
   ['letters for digits', HEAT, lines(HEAT, { part_number: '1O-2OO' })],
+  ['a revision recognised twice', HEAT, lines(HEAT, { rev: 'AA' }), { file: { ...FILE, recognised: true } }],
   ['a revision in words', HEAT, lines(HEAT, { rev: 'Rev. A' })],
   ['a revision that is not stated', HEAT, lines(HEAT, { rev: null })],
   ['honest rejects', HEAT, lines(HEAT, { qty_accepted: 10, qty_rejected: 2 })],
@@ -364,6 +392,55 @@ const RIGHT: Case[] = [
   ['a year in full', NDT, { specification: 'ASTM E1417/E1417M', specification_revision: '2021' }],
   ['a reapproved year', NDT, { specification: 'ASTM E1417-21(2025)', specification_revision: null }],
   ['no revision', HEAT, { specification_revision: null }],
+  [
+    'a part on the page whose line was not read',
+    HEAT,
+    { lines: agreeing(HEAT).lines.slice(0, 1) },
+    { file: { ...FILE, pages: [withWords('Lot L1 10-200 Clip', '10 - 311 Bracket')] } },
+  ],
+  [
+    'another number read for a part on the page',
+    HEAT,
+    lines(HEAT, { part_number: 'J54958', lot: null }),
+    { file: { ...FILE, pages: [withWords('10-200')] } },
+  ],
+  [
+    'parts on the page and no lines',
+    HEAT,
+    { lines: [] },
+    { file: { ...FILE, pages: [withWords('10-200 and 10-311')] } },
+  ],
+  [
+    'a bake on the page that was not read',
+    PLATE,
+    { cycles: [], bake_start: null, bake_end: null },
+    { file: { ...FILE, pages: [withWords('Baked: 375F for 23.5 hours')] } },
+  ],
+  [
+    'ageing on the page that was not read',
+    HEAT,
+    { cycles: agreeing(HEAT).cycles.slice(0, 1) },
+    { file: { ...FILE, pages: [withWords('Aged naturally 96 hours')] } },
+  ],
+  [
+    'a number without pieces',
+    HEAT,
+    {
+      lines: [
+        ...agreeing(HEAT).lines,
+        {
+          ...lineOf(HEAT),
+          part_number: 'TEMP 900',
+          rev: null,
+          lot: null,
+          qty_accepted: null,
+          qty_rejected: null,
+        },
+      ],
+    },
+  ],
+  ['minutes misread as hours', HEAT, cycles(HEAT, 'solution', { minutes: 38 * 60 })],
+  ['one time for start and end', HEAT, cycles(HEAT, 'solution', { soak_end: '2026-03-05T09:12' })],
   ['two specifications', HEAT, { specification: 'AMS2750, AMS2770R', specification_revision: null }],
   ['arabic types', PLATE, { class_type: 'Ty. 2 Cl. 2' }],
   ['a class in other words', PLATE, { class_type: 'golden chromate' }],
@@ -397,6 +474,12 @@ const RIGHT: Case[] = [
     'two scales of hardness',
     HEAT,
     { readings: [reading('hardness', 'HRB', 70), reading('hardness', 'HB', 110)] },
+  ],
+  [
+    'a reading whose point was not recognised',
+    HEAT,
+    { readings: [reading('conductivity', '% IACS', 30.1, 325), reading('hardness', 'HRB', 70.5, 71, 690)] },
+    { file: { ...FILE, recognised: true } },
   ],
   ['micrometres', PLATE, { readings: [reading('thickness', 'µm', 7.62, 12.7)] }],
   ['micrometres at their rounded end', PLATE, { readings: [reading('thickness', 'microns', 7.6)] }],

@@ -98,6 +98,11 @@ test('mils and inches are moved points, so that nothing is excused', () => {
   expect(at(0.0003, 'in')).toBe('meets');
 });
 
+test('small numbers keep their figures', () => {
+  const { verdicts } = compared(PLATE, { readings: [{ kind: 'thickness', unit: 'in', values: [0.00035] }] });
+  expect(verdicts.find(({ requirement }) => requirement.startsWith('coating'))?.stated).toBe('0.00035 in');
+});
+
 test('a hardness in another scale is converted, and proves nothing', () => {
   const order = asking(PLATE, { hardness: { scale: 'HRC', min: 36, max: 42 } });
   const result = compared(order, { readings: [{ kind: 'hardness', unit: 'HV', values: [392] }] });

@@ -122,7 +122,10 @@ const PLANTED: Record<string, Case[]> = {
       { order: { ...ORDER, price: { ...ORDER.price, currency: 'USD', freight: 5 } } as Order },
     ],
   ],
-  tax_mismatch: [['', { tax: 9, tax_rate: 8, total: 119 }]],
+  tax_mismatch: [
+    ['with its total', { tax: 9, tax_rate: 8, total: 119 }],
+    ['with the total of the right one', { tax: 9, tax_rate: 8, total: 118.8 }],
+  ],
   arithmetic: [
     ['a line', { ...withFirst({ amount: 33 }), lot_minimum_adjustment: 47 }],
     ['a line, and the total reckoned rightly', withFirst({ amount: 33 })],
