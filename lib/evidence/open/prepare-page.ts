@@ -3,6 +3,7 @@ import type { Component } from './picture/find-components';
 import { toGrey, type Coloured } from './picture/colours';
 import { findSheet, type Corners } from './picture/find-sheet';
 import { findStamps } from './picture/find-stamps';
+import { guessUpsideDown } from './picture/guess-upside-down';
 import type { Grey, Ink, PixelBox } from './picture/grey';
 import { levelLight } from './picture/level-light';
 import { chainProjections, quarterTurn, SAME_PLACE, type Projection } from './picture/projection';
@@ -54,7 +55,7 @@ export function preparePage(source: PagePicture): Prepared {
   const level = levelLight(flat.picture, Math.round(TILE_INCHES * flat.dpi));
   const lying = straighten(level, flat.dpi);
   const straight = { ...lying, projection: chainProjections(flat.projection, lying.projection) };
-  return {
+  const page: Prepared = {
     source,
     straight,
     dpi: flat.dpi,
@@ -63,6 +64,7 @@ export function preparePage(source: PagePicture): Prepared {
     stamps: onPage(stamps?.boxes, straight.projection),
     hands: onPage(stamps?.hands, straight.projection),
   };
+  return guessUpsideDown(page.components, page.dpi) ? turnPrepared(page, 180) : page;
 }
 
 /** The same page, its straightened picture turned further. */

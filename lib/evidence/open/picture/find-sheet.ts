@@ -14,6 +14,7 @@ const STRONGEST = 40;
 const REACH = 2;
 const BEYOND = 40;
 const MOST_CANDIDATES = 40;
+const GROUND_AROUND = 0.2;
 
 interface Side {
   /** `at` is where the edge crosses the middle of the picture, `slope` its lean: position = at + slope · (along − middle). */
@@ -29,6 +30,7 @@ interface Side {
  * picture's own. Gives null when fewer than two edges are seen, as in a scan.
  */
 export function findSheet(picture: Grey): Corners | null {
+  if (!hasGroundAround(picture)) return null;
   const soft = soften(picture);
   const turned = transposed(soft);
   const { width, height } = soft;
@@ -51,6 +53,17 @@ export function findSheet(picture: Grey): Corners | null {
   };
   const corners: Corners = [corner(l, t), corner(r, t), corner(r, b), corner(l, b)];
   return isSheet(corners, width, height) ? corners : null;
+}
+
+/** Whether enough of the picture's rim is darker than paper: quickly told, and not so of a scan. */
+function hasGroundAround({ width, height, data }: Grey): boolean {
+  const rim: number[] = [];
+  for (let x = 0; x < width; x++)
+    rim.push(data[2 * width + x] as number, data[(height - 3) * width + x] as number);
+  for (let y = 0; y < height; y++)
+    rim.push(data[y * width + 2] as number, data[y * width + width - 3] as number);
+  const paper = Uint8Array.from(data).sort()[Math.floor(data.length * 0.85)] ?? 255;
+  return rim.filter((value) => value < paper - 2 * STEP).length > GROUND_AROUND * rim.length;
 }
 
 /** Large enough, and bulging nowhere inwards. */

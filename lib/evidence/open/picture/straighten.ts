@@ -1,8 +1,6 @@
 import type { Grey, Ink } from './grey';
-import { findComponents } from './find-components';
 import { findInk, inkThreshold } from './find-ink';
 import { findLie } from './find-skew';
-import { guessUpsideDown } from './guess-upside-down';
 import {
   chainProjections,
   inverseOf,
@@ -26,7 +24,7 @@ export interface Straightened {
 const DPI_TO_LOOK = 90;
 const STRAIGHT_ENOUGH = 0.08;
 
-/** Turns a levelled page so that its lines of text run level, and, as far as can be told, upright. */
+/** Turns a levelled page so that its lines of text run level. It may still stand on its head. */
 export function straighten(picture: Grey, dpi: number): Straightened {
   const factor = Math.max(1, Math.round(dpi / DPI_TO_LOOK));
   const small = shrink(picture, factor);
@@ -34,12 +32,7 @@ export function straighten(picture: Grey, dpi: number): Straightened {
   const lie = findLie(ink);
   const quarter = lie.sideways ? 90 : 0;
   const skew = Math.abs(lie.skew) < STRAIGHT_ENOUGH ? 0 : lie.skew;
-  const level = turnBy(picture, quarter, skew);
-  const upsideDown = guessUpsideDown(
-    findComponents(findInk(level.picture, inkThreshold(level.picture))),
-    dpi,
-  );
-  return upsideDown ? turnFurther(level, 180) : level;
+  return turnBy(picture, quarter, skew);
 }
 
 /** The same page turned further, clockwise. */

@@ -5,6 +5,7 @@ import { findInk, inkThreshold } from '@/lib/evidence/open/picture/find-ink';
 import { findRules } from '@/lib/evidence/open/picture/find-rules';
 import { findLie } from '@/lib/evidence/open/picture/find-skew';
 import { findSpecks } from '@/lib/evidence/open/picture/find-specks';
+import { guessUpsideDown } from '@/lib/evidence/open/picture/guess-upside-down';
 import { levelLight } from '@/lib/evidence/open/picture/level-light';
 import { project, rotationAbout } from '@/lib/evidence/open/picture/projection';
 import { shrink } from '@/lib/evidence/open/picture/shrink';
@@ -87,19 +88,23 @@ describe('how a page lies', () => {
     );
   });
 
-  test.each([0, 90, 180, 270] as const)('a page turned by %i degrees is turned back', (degrees) => {
-    const turned = degrees % 180 === 0 ? { width: 700, height: 900 } : { width: 900, height: 700 };
-    const back = {
-      0: [1, 0, 0, 0, 1, 0],
-      90: [0, 1, 0, -1, 0, 900],
-      180: [-1, 0, 700, 0, -1, 900],
-      270: [0, -1, 700, 1, 0, 0],
-    }[degrees];
-    const lying = warp(page, [...back, 0, 0, 1] as never, turned);
-    const straight = straighten(lying, 90);
-    expect(straight.turned).toBe((360 - degrees) % 360);
-    expect(straight.picture.width).toBe(700);
-  });
+  test.each([0, 90, 180, 270] as const)(
+    'a page turned by %i degrees is turned back to its feet or its head',
+    (degrees) => {
+      const turned = degrees % 180 === 0 ? { width: 700, height: 900 } : { width: 900, height: 700 };
+      const back = {
+        0: [1, 0, 0, 0, 1, 0],
+        90: [0, 1, 0, -1, 0, 900],
+        180: [-1, 0, 700, 0, -1, 900],
+        270: [0, -1, 700, 1, 0, 0],
+      }[degrees];
+      const lying = warp(page, [...back, 0, 0, 1] as never, turned);
+      const straight = straighten(lying, 90);
+      const headOver = guessUpsideDown(findComponents(inkOf(straight.picture)), 90);
+      expect((straight.turned + (headOver ? 180 : 0)) % 360).toBe((360 - degrees) % 360);
+      expect(straight.picture.width).toBe(700);
+    },
+  );
 });
 
 test('two quarters are a half, two halves nothing', () => {
