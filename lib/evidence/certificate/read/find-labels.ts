@@ -192,7 +192,7 @@ function tailOf(text: string, plain: string, from: number, key: LabelKey): Tail 
   let end = from + (/^\.(?![.\s]*\.)/.exec(text.slice(from))?.[0].length ?? 0);
   let qualifier = '';
   const also: LabelKey[] = [];
-  for (let turn = 0; turn < 3; turn += 1) {
+  for (let turn = 0; turn < 6; turn += 1) {
     const second = secondLabel(text, plain, end);
     if (second) {
       if (second.key && second.key !== key && !also.includes(second.key)) also.push(second.key);
@@ -231,6 +231,9 @@ function secondLabel(
 function furtherWords(text: string, plain: string, from: number): { key: LabelKey; end: number } | null {
   const gap = /^[\s,]+/.exec(text.slice(from))?.[0].length ?? 0;
   const found = gap > 0 ? phraseAt(plain, from + gap) : null;
-  if (!found || !/^\.?\s*(?:$|[:;=(]|\.{3})/.test(text.slice(found.end))) return null;
-  return { key: found.phrase.key, end: found.end };
+  if (!found) return null;
+  const isLast = /^\.?\s*(?:$|[:;=(]|\.{3})/.test(text.slice(found.end));
+  const stop = text.charAt(found.end) === '.' ? 1 : 0;
+  if (!isLast && !furtherWords(text, plain, found.end + stop)) return null;
+  return { key: found.phrase.key, end: found.end + stop };
 }

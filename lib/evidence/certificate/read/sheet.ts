@@ -32,6 +32,8 @@ export interface Sheet {
   readonly lines: readonly Line[];
   readonly marks: readonly Mark[];
   readonly tables: readonly Table<FoundLabel>[];
+  /** The step in whose part of the form each table stands. */
+  readonly sections: readonly (Step | null)[];
   readonly asked: readonly Asked[];
   /** Sentences over all their lines; a line that is none stands alone. */
   readonly paragraphs: readonly Passage[];
@@ -55,6 +57,10 @@ export function sheetOf(page: Page): Sheet {
     lines,
     marks: page.marks,
     tables,
+    sections: tables.map(({ from }) => {
+      const first = lines[from]?.segments[0];
+      return first ? sectionOf(lines, from, first) : null;
+    }),
     asked: askedOn(lines, tables, page.number),
     paragraphs: paragraphsOf(lines),
   };
@@ -214,6 +220,7 @@ function sectionOf(lines: readonly Line[], index: number, segment: Segment): Ste
     if (!line) continue;
     for (const other of line.segments) {
       if (other === segment || !isHeading(other, line, above === index ? segment : null)) continue;
+      if (answersLabel(other, line)) continue;
       const beside = above !== index && sharedAcross(other.box, segment.box) <= 0 && line.segments.length > 1;
       if (beside) continue;
       const steps = stepsIn(other.text);
@@ -223,6 +230,12 @@ function sectionOf(lines: readonly Line[], index: number, segment: Segment): Ste
     }
   }
   return null;
+}
+
+/** Words right of a label are its value: the name of a process says what the certificate is of, not where a part begins. */
+function answersLabel(other: Segment, { segments }: Line): boolean {
+  const before = segments[segments.indexOf(other) - 1];
+  return before !== undefined && labelAtStart(before.text)?.whole === true;
 }
 
 /** A few words without figures that are no label of a value beside them. Left of the label on its own line also counts. */
