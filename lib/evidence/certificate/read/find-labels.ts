@@ -112,8 +112,8 @@ export function labelsIn(text: string): FoundLabel[] {
 
 function labelAt(text: string, plain: string, at: number, first: boolean): FoundLabel | null {
   const bare = phraseAt(plain, at);
-  const stepped = bare && /\s/.test(plain.slice(at, bare.end)) ? null : steppedAt(text, plain, at);
-  const best = stepped ?? (bare ? { ...bare, step: null } : null);
+  const stepped = steppedAt(text, plain, at);
+  const best = stepped && stepped.end > (bare?.end ?? 0) ? stepped : bare && { ...bare, step: null };
   if (!best) return null;
   // "PO-5001" is a number and no question for one.
   if (/^-?\d|^[-/][\p{L}\d]/u.test(text.slice(best.end)) && !text.slice(at, best.end).endsWith('#'))

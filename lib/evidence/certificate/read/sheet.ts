@@ -127,7 +127,7 @@ function askedOn(lines: readonly Line[], tables: readonly Table<FoundLabel>[], p
       labels.forEach((label, turn) => {
         if (inTable && (label.whole || !label.marked)) return;
         // In the middle of a sentence the first word of a line is no label.
-        if (prose.has(index) && !label.marked) return;
+        if (prose.has(index) && !label.marked && !(label.whole && row.length > 1)) return;
         const until = labels[turn + 1]?.start ?? segment.text.length;
         const spot = spotIn(segment, label.start, label.end);
         if (!spot) return;
@@ -164,6 +164,8 @@ function valuesOf(where: Place): AskedValue[] {
   }
   const [next] = right;
   if (next) values.push({ passage: next, how: 'right' });
+  // Dots of a leader may be read as letters: what comes behind them is tried too.
+  for (const further of right.slice(1)) values.push({ passage: further, how: 'line' });
   if (right.length > 1) values.push({ passage: joined(right), how: 'line' });
   if (below) {
     const value: AskedValue = { passage: below, how: 'below' };
@@ -280,5 +282,13 @@ function runsOn(last: Line, line: Line): boolean {
   const [first] = line.segments;
   const label = first ? labelAtStart(first.text) : null;
   const listed = /^\s*(?:[-–•*·]|\d{1,2}[.)])\s/.test(first?.text ?? '');
-  return close && level && wide && prose && !listed && !(label?.marked ?? false);
+  return (
+    close &&
+    level &&
+    wide &&
+    prose &&
+    !listed &&
+    !(label?.marked ?? false) &&
+    !(label?.whole && line.segments.length > 1)
+  );
 }
