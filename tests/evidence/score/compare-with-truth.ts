@@ -12,17 +12,54 @@ export interface Judged {
 }
 
 const plain = (value: unknown): string | null =>
-  value === null || value === undefined ? null : String(value).toLowerCase().replace(/[^\p{L}\p{N}.]/gu, '');
+  value === null || value === undefined
+    ? null
+    : String(value)
+        .toLowerCase()
+        .replace(/[^\p{L}\p{N}.]/gu, '');
 
 /** Each field of a certificate beside what was written on it. */
 export function judge(truth: Truth, read: StatedCertificate): Judged[] {
-  const one = (field: string, expected: unknown, found: unknown, path = field): Judged => {
+  const one: One = (field, expected, found, path = field) => {
     const [a, b] = [plain(expected), plain(found)];
-    const outcome = a === b ? (a === null ? 'rightly_null' : 'right') : a === null ? 'invented' : b === null ? 'missed' : 'wrong';
-    return { field, path, truth: expected === null ? null : String(expected), read: b === null ? null : String(found), outcome };
+    const outcome = outcomeOf(a, b);
+    return {
+      field,
+      path,
+      truth: expected === null ? null : String(expected),
+      read: b === null ? null : String(found),
+      outcome,
+    };
   };
-  const SCALARS = ['processor', 'certificate_number', 'certificate_date', 'purchase_order', 'batch', 'process', 'specification', 'specification_revision', 'class_type', 'quench_delay_s', 'plating_end', 'bake_start', 'bake_end', 'signature_present', 'conformance_statement'] as const;
-  return [...SCALARS.map((field) => one(field, truth[field], read[field])), ...linesOf(truth, read, one), ...cyclesOf(truth, read, one), ...readingsOf(truth, read, one)];
+  const SCALARS = [
+    'processor',
+    'certificate_number',
+    'certificate_date',
+    'purchase_order',
+    'batch',
+    'process',
+    'specification',
+    'specification_revision',
+    'class_type',
+    'quench_delay_s',
+    'plating_end',
+    'bake_start',
+    'bake_end',
+    'signature_present',
+    'conformance_statement',
+  ] as const;
+  return [
+    ...SCALARS.map((field) => one(field, truth[field], read[field])),
+    ...linesOf(truth, read, one),
+    ...cyclesOf(truth, read, one),
+    ...readingsOf(truth, read, one),
+  ];
+}
+
+function outcomeOf(truth: string | null, read: string | null): Judged['outcome'] {
+  if (truth === null) return read === null ? 'rightly_null' : 'invented';
+  if (read === null) return 'missed';
+  return truth === read ? 'right' : 'wrong';
 }
 
 type One = (field: string, expected: unknown, found: unknown, path?: string) => Judged;
@@ -38,9 +75,18 @@ function linesOf(truth: Truth, read: StatedCertificate, one: One): Judged[] {
   return [
     ...pairs.flatMap(({ line, found: exact }) => {
       const found = exact ?? left.shift();
-      return FIELDS.map((field) => one(`lines.${field}`, line[field], found?.line[field] ?? null, `lines[${found?.index ?? -1}].${field}`));
+      return FIELDS.map((field) =>
+        one(
+          `lines.${field}`,
+          line[field],
+          found?.line[field] ?? null,
+          `lines[${found?.index ?? -1}].${field}`,
+        ),
+      );
     }),
-    ...left.flatMap(({ line, index }) => FIELDS.map((field) => one(`lines.${field}`, null, line[field], `lines[${index}].${field}`))),
+    ...left.flatMap(({ line, index }) =>
+      FIELDS.map((field) => one(`lines.${field}`, null, line[field], `lines[${index}].${field}`)),
+    ),
   ];
 }
 
@@ -50,7 +96,9 @@ function cyclesOf(truth: Truth, read: StatedCertificate, one: One): Judged[] {
   return steps.flatMap((step) => {
     const index = read.cycles.findIndex((cycle) => cycle.step === step);
     const [expected, found] = [truth.cycles.find((cycle) => cycle.step === step), read.cycles[index]];
-    return FIELDS.map((field) => one(`cycles.${field}`, expected?.[field] ?? null, found?.[field] ?? null, `cycles[${index}].${field}`));
+    return FIELDS.map((field) =>
+      one(`cycles.${field}`, expected?.[field] ?? null, found?.[field] ?? null, `cycles[${index}].${field}`),
+    );
   });
 }
 
@@ -61,7 +109,12 @@ function readingsOf(truth: Truth, read: StatedCertificate, one: One): Judged[] {
     const [expected, found] = [truth.readings.find((reading) => reading.kind === kind), read.readings[index]];
     return [
       one('readings.unit', expected?.unit ?? null, found?.unit ?? null, `readings[${index}].unit`),
-      one('readings.values', expected?.values.join('; ') ?? null, found?.values.join('; ') ?? null, `readings[${index}].values`),
+      one(
+        'readings.values',
+        expected?.values.join('; ') ?? null,
+        found?.values.join('; ') ?? null,
+        `readings[${index}].values`,
+      ),
     ];
   });
 }

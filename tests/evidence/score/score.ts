@@ -53,7 +53,8 @@ async function readOne(made: MadeCertificate, kind: Kind, tally: Tally): Promise
   const opened = await openFile(made.bytes, { name: made.name, recogniser });
   const stated = statedIn(opened);
   tally.seconds(performance.now() - started, made.pages);
-  if (stated.length !== made.truths.length) say(`${stated.length} certificates instead of ${made.truths.length}`);
+  if (stated.length !== made.truths.length)
+    say(`${stated.length} certificates instead of ${made.truths.length}`);
   made.truths.forEach((truth, index) => {
     const read = stated[index];
     if (!read) {
@@ -63,12 +64,21 @@ async function readOne(made: MadeCertificate, kind: Kind, tally: Tally): Promise
     for (const field of judge(truth, read)) {
       const fact = read.facts.find((one) => one.field === field.path);
       tally.field(field, fact?.confidence ?? null);
-      if (!/right/.test(field.outcome)) say(`${field.path} is "${field.truth ?? 'null'}", read "${field.read ?? 'null'}" (${fact?.confidence ?? '-'})`);
+      if (!/right/.test(field.outcome))
+        say(
+          `${field.path} is "${field.truth ?? 'null'}", read "${field.read ?? 'null'}" (${fact?.confidence ?? '-'})`,
+        );
     }
   });
   const [first, ...others] = stated;
   if (!first) return;
-  const { discrepancies } = compare({ stated: first, file: opened, order: made.story.order, others, today: made.story.today });
+  const { discrepancies } = compare({
+    stated: first,
+    file: opened,
+    order: made.story.order,
+    others,
+    today: made.story.today,
+  });
   const codes = discrepancies.map(({ code }) => code);
   const missed = made.planted.filter((code) => !codes.includes(code));
   const alarms = discrepancies.filter(({ code }) => !made.planted.includes(code));

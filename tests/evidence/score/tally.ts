@@ -6,7 +6,8 @@ interface Counts {
   stated: number;
 }
 
-const percent = (share: number): string => (Number.isFinite(share) ? (100 * share).toFixed(1) : '-').padStart(6);
+const percent = (share: number): string =>
+  (Number.isFinite(share) ? (100 * share).toFixed(1) : '-').padStart(6);
 
 /** What is counted over certificates. */
 export class Tally {
@@ -29,7 +30,11 @@ export class Tally {
     if (confidence === null || outcome === 'missed' || outcome === 'rightly_null') return;
     const bin = Math.min(9, Math.floor(confidence * 10 + 1e-9)) + (confidence >= 0.95 ? 0.5 : 0);
     const seen = this.bins.get(bin) ?? { given: 0, right: 0, sum: 0 };
-    this.bins.set(bin, { given: seen.given + 1, right: seen.right + Number(outcome === 'right'), sum: seen.sum + confidence });
+    this.bins.set(bin, {
+      given: seen.given + 1,
+      right: seen.right + Number(outcome === 'right'),
+      sum: seen.sum + confidence,
+    });
   }
 
   seconds(milliseconds: number, pages: number): void {
@@ -67,15 +72,20 @@ export class Tally {
     }
     printCounts('all fields', total);
     const recall = (this.planted - this.missed) / this.planted;
-    console.log(`discrepancies: ${this.planted} planted, recall ${percent(recall).trim()} %, false alarms ${(this.alarms / this.files).toFixed(3)} per certificate`);
-    if (this.lostCertificates > 0) console.log(`${this.lostCertificates} certificates were not found in their files`);
+    console.log(
+      `discrepancies: ${this.planted} planted, recall ${percent(recall).trim()} %, false alarms ${(this.alarms / this.files).toFixed(3)} per certificate`,
+    );
+    if (this.lostCertificates > 0)
+      console.log(`${this.lostCertificates} certificates were not found in their files`);
     console.log(`${(this.milliseconds / this.pages / 1000).toFixed(3)} seconds per page`);
   }
 
   printCalibration(): void {
     console.log('\nconfidence   facts   mean   right');
     for (const [bin, { given, right, sum }] of [...this.bins].sort(([a], [b]) => a - b))
-      console.log(`${(bin / 10).toFixed(2)}…       ${String(given).padStart(6)} ${percent(sum / given)} ${percent(right / given)}`);
+      console.log(
+        `${(bin / 10).toFixed(2)}…       ${String(given).padStart(6)} ${percent(sum / given)} ${percent(right / given)}`,
+      );
   }
 }
 
@@ -83,5 +93,7 @@ function printCounts(name: string, { right, read, stated }: Counts): void {
   const precision = right / read;
   const recall = right / stated;
   const f1 = (2 * right) / (read + stated);
-  console.log(`${name.padEnd(26)}   ${percent(precision)} ${percent(recall)} ${percent(f1)}  ${String(stated).padStart(6)}`);
+  console.log(
+    `${name.padEnd(26)}   ${percent(precision)} ${percent(recall)} ${percent(f1)}  ${String(stated).padStart(6)}`,
+  );
 }

@@ -95,7 +95,7 @@ function rowLabelled({ table, row, name, order, section }: RowPlace): Answer[] |
   const results = headings.flatMap((heading, index) => (heading && FOUND.has(heading.key) ? [index] : []));
   const steps = headings.flatMap((heading, index) => (index > 0 && heading?.step ? [index] : []));
   const places = headings.flatMap((heading, index) => (heading?.key === 'specimen' ? [index] : []));
-  const asks = results.length > 0 ? results : steps.length > 1 ? steps : places.length > 1 ? places : [];
+  const asks = results.length > 0 ? results : ([steps, places].find(({ length }) => length > 1) ?? []);
   const first = row.cells.findIndex(
     (cell, index) => cell !== null && !/^\d{1,2}\.?$/.test(cell.text) && !asks.includes(index),
   );
