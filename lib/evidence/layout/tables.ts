@@ -162,6 +162,8 @@ function endsAt<Heading>(
   if (headingAt(lines, at, reader) !== null) return true;
   const [only, second, third] = line.segments;
   if (line.segments.some(({ text }) => SUM.test(text))) return true;
+  // Nothing but labels: the next row of a form whose values stand below.
+  if (line.segments.every(({ text }) => text.length > 2 && reader.read(text) !== null)) return true;
   // A label with its value under a table of more columns is a field of its own.
   if (only && second && !third && columns.length >= 4 && reader.read(only.text) !== null) return true;
   // A sentence under the table, which runs through its columns.

@@ -57,7 +57,7 @@ function assemble(page: Prepared, recognised: readonly RecognisedWord[]): Page {
   const componentsAt = byRows(page.components);
   const strokes = [...findStrokes(page.components, [...sure, ...page.stamps], dpi), ...page.hands];
   const words = recognised
-    .filter(isWord)
+    .filter((word, index) => isWord(word) || isNumeral(word, recognised[index - 1]))
     .map((word) => ({ ...word, text: lookAgain(word.text, word.box, componentsAt(word.box), page.ink) }))
     .filter(
       ({ box, confidence }) =>
@@ -101,6 +101,10 @@ function byRows(components: readonly Component[]): (box: PixelBox) => Component[
 /** Remains of rules and dust are read as bars and points of their own. */
 const isWord = ({ text, confidence }: RecognisedWord) =>
   /[\p{L}\p{N}]/u.test(text) || (confidence > 0.5 && !/^[|_~=.,'`‘’“”"°•©®«»—–]+$/.test(text));
+
+/** A Roman one is read as a bar: "Type | Class 1A". */
+const isNumeral = ({ text }: RecognisedWord, before: RecognisedWord | undefined) =>
+  text === '|' && /^(?:type|class|level|method|typ|klasse|classe|tipo|clase)[:.]?$/i.test(before?.text ?? '');
 
 function filed({ source, straight, dpi }: Prepared): { turned: Page['turned']; asFiled: AsFiled | null } {
   const turned = ((source.turned + straight.turned) % 360) as Page['turned'];

@@ -1,5 +1,14 @@
 import type { Paper, TextStyle } from './sheet-of-paper';
 
+/** Left edge and width, in points. */
+export type Across = readonly [x: number, width: number];
+
+/** Headings, whose lines are parted by a line break, and the cells under them. */
+export interface Grid {
+  readonly heads: readonly string[];
+  readonly rows: readonly (readonly string[])[];
+}
+
 export interface Pair {
   readonly label: string;
   readonly value: string;
@@ -40,8 +49,7 @@ export function twoColumns(
   paper: Paper,
   list: readonly Pair[],
   x: number,
-  columnWidth: number,
-  style: PairStyle,
+  { columnWidth, ...style }: PairStyle & { readonly columnWidth: number },
 ): void {
   const half = Math.ceil(list.length / 2);
   const top = paper.y;
@@ -63,8 +71,7 @@ export interface CardStyle {
 export function cards(
   paper: Paper,
   list: readonly Pair[],
-  x: number,
-  width: number,
+  [x, width]: Across,
   { columns, framed, small = true, height = 30 }: CardStyle,
 ): void {
   const each = width / columns;
@@ -90,14 +97,7 @@ export interface TableStyle {
 }
 
 /** A table whose columns are as wide as their widest cell, spread over the width. Headings may have two lines. */
-export function table(
-  paper: Paper,
-  heads: readonly string[],
-  rows: readonly (readonly string[])[],
-  x: number,
-  width: number,
-  style: TableStyle,
-): void {
+export function table(paper: Paper, { heads, rows }: Grid, [x, width]: Across, style: TableStyle): void {
   const { rules, align = 'left', pitch = 1.7, headSize = paper.size, shaded = false } = style;
   const natural = heads.map(
     (head, column) =>
@@ -118,7 +118,7 @@ export function table(
   const put = (text: string, column: number, y: number, text_: TextStyle): void => {
     const left = edges[column] ?? x;
     const room = widths[column] ?? 0;
-    const at = align === 'left' ? left + 4 : align === 'right' ? left + room - 4 : left + room / 2;
+    const at = { left: left + 4, right: left + room - 4, centre: left + room / 2 }[align];
     paper.text(text, at, y, { ...text_, align });
   };
   heads.forEach((head, column) =>
@@ -133,11 +133,11 @@ export function table(
   );
   const bottom = top + headHeight + step * rows.length;
   if (rules !== 'none') {
-    paper.rule(x, top, right, top);
+    paper.rule([x, top], [right, top]);
     for (let index = 0; index <= rows.length; index += 1)
-      paper.rule(x, top + headHeight + step * index, right, top + headHeight + step * index);
+      paper.rule([x, top + headHeight + step * index], [right, top + headHeight + step * index]);
   }
-  if (rules === 'all') for (const edge of edges) paper.rule(edge, top, edge, bottom);
+  if (rules === 'all') for (const edge of edges) paper.rule([edge, top], [edge, bottom]);
   paper.y = bottom + paper.size * 1.6;
 }
 

@@ -1,5 +1,5 @@
 import { printedUnit } from './as-printed';
-import type { Pair } from './blocks';
+import type { Grid, Pair } from './blocks';
 import type { Dice } from './dice';
 import type { Story } from './story';
 import { degrees, figure, lasting, moment, type Hand } from './wording';
@@ -155,11 +155,6 @@ const HEADS = {
 
 export const headOf = ({ hand, dice }: Told, name: keyof typeof HEADS): string =>
   dice.pick(HEADS[name][hand.language]);
-
-export interface Grid {
-  readonly heads: readonly string[];
-  readonly rows: readonly (readonly string[])[];
-}
 
 /** The lines as a table. */
 export function partsGrid(told: Told, withDescription = true): Grid {

@@ -72,43 +72,49 @@ const numberedGrid: Layout = {
     paper.y += Math.ceil(cells.length / 2) * 20 + 12;
     table(
       paper,
-      ['11. Part No.', '12. Rev.', '13. Lot', '14. Qty accepted', '15. Qty rejected'],
-      truth.lines.map((one) => [
-        one.part_number ?? '',
-        one.rev ?? '',
-        one.lot ?? '',
-        String(one.qty_accepted),
-        String(one.qty_rejected),
-      ]),
-      40,
-      532,
+      {
+        heads: ['11. Part No.', '12. Rev.', '13. Lot', '14. Qty accepted', '15. Qty rejected'],
+        rows: truth.lines.map((one) => [
+          one.part_number ?? '',
+          one.rev ?? '',
+          one.lot ?? '',
+          String(one.qty_accepted),
+          String(one.qty_rejected),
+        ]),
+      },
+      [40, 532],
       { rules: 'all', align: 'centre' },
     );
     if (truth.cycles.length > 0)
       table(
         paper,
-        ['Cycle', 'Set point (°F)', 'Date in', 'Time in', 'Date out', 'Time out', 'Soak (min)'],
-        truth.cycles.map((cycle) => [
-          STEP[cycle.step] ?? '',
-          cycle.set_temp === null ? 'R.T.' : String(cycle.set_temp),
-          hand.day(cycle.soak_start?.slice(0, 10) ?? ''),
-          cycle.soak_start?.slice(11) ?? '',
-          hand.day(cycle.soak_end?.slice(0, 10) ?? ''),
-          cycle.soak_end?.slice(11) ?? '',
-          String(cycle.minutes),
-        ]),
-        40,
-        532,
+        {
+          heads: ['Cycle', 'Set point (°F)', 'Date in', 'Time in', 'Date out', 'Time out', 'Soak (min)'],
+          rows: truth.cycles.map((cycle) => [
+            STEP[cycle.step] ?? '',
+            cycle.set_temp === null ? 'R.T.' : String(cycle.set_temp),
+            hand.day(cycle.soak_start?.slice(0, 10) ?? ''),
+            cycle.soak_start?.slice(11) ?? '',
+            hand.day(cycle.soak_end?.slice(0, 10) ?? ''),
+            cycle.soak_end?.slice(11) ?? '',
+            String(cycle.minutes),
+          ]),
+        },
+        [40, 532],
         { rules: 'all', align: 'centre' },
       );
     for (const reading of truth.readings) {
       const unit = printedUnit(reading.unit, dice);
       table(
         paper,
-        [`${KIND[reading.kind] ?? ''} ${unit}`, ...reading.values.map((_, index) => `No. ${index + 1}`)],
-        [['Reading', ...reading.values.map(String)]],
-        40,
-        400,
+        {
+          heads: [
+            `${KIND[reading.kind] ?? ''} ${unit}`,
+            ...reading.values.map((_, index) => `No. ${index + 1}`),
+          ],
+          rows: [['Reading', ...reading.values.map(String)]],
+        },
+        [40, 400],
         { rules: 'all' },
       );
     }
@@ -124,7 +130,7 @@ const numberedGrid: Layout = {
     paper.y += 36;
     if (truth.signature_present) paper.sign(150, paper.y, dice.whole(100, 9000));
     paper.text('30. Authorized signature', 44, paper.y);
-    paper.rule(150, paper.y + 2, 320, paper.y + 2);
+    paper.rule([150, paper.y + 2], [320, paper.y + 2]);
     paper.text(`31. Name  ${story.signer}`, 340, paper.y);
     return paper.save();
   },
@@ -141,7 +147,7 @@ const processRecord: Layout = {
     paper.text('PROCESS RECORD AND RELEASE', 50, 50, { bold: true, size: 14 });
     paper.text(truth.processor ?? '', 545, 50, { bold: true, size: 12, align: 'right' });
     paper.text(story.address.join(', '), 545, 64, { size: 8, align: 'right' });
-    paper.rule(50, 74, 545, 74, 1.2);
+    paper.rule([50, 74], [545, 74], 1.2);
     paper.y = 96;
     const left = [
       { label: 'Certificate ref', value: truth.certificate_number ?? '' },
@@ -159,34 +165,41 @@ const processRecord: Layout = {
     paper.y += 8;
     table(
       paper,
-      ['Drawing no.', 'Issue', 'Alloy / form', 'Cast/lot', 'Good', 'Scrap'],
-      truth.lines.map((one) => [
-        one.part_number ?? '',
-        one.rev ?? '',
-        one.material ?? '',
-        one.lot ?? '',
-        String(one.qty_accepted),
-        String(one.qty_rejected),
-      ]),
-      50,
-      495,
+      {
+        heads: ['Drawing no.', 'Issue', 'Alloy / form', 'Cast/lot', 'Good', 'Scrap'],
+        rows: truth.lines.map((one) => [
+          one.part_number ?? '',
+          one.rev ?? '',
+          one.material ?? '',
+          one.lot ?? '',
+          String(one.qty_accepted),
+          String(one.qty_rejected),
+        ]),
+      },
+      [50, 495],
       { rules: 'horizontal' },
     );
     if (truth.cycles.length > 1)
       table(
         paper,
-        ['Parameter', ...truth.cycles.map(({ step }) => STEP[step] ?? '')],
-        [
-          [
-            'Temperature',
-            ...truth.cycles.map(({ set_temp }) => (set_temp === null ? 'ambient' : degrees(hand, set_temp))),
+        {
+          heads: ['Parameter', ...truth.cycles.map(({ step }) => STEP[step] ?? '')],
+          rows: [
+            [
+              'Temperature',
+              ...truth.cycles.map(({ set_temp }) =>
+                set_temp === null ? 'ambient' : degrees(hand, set_temp),
+              ),
+            ],
+            ['Start', ...truth.cycles.map(({ soak_start }) => moment(hand, soak_start ?? ''))],
+            ['End', ...truth.cycles.map(({ soak_end }) => moment(hand, soak_end ?? ''))],
+            [
+              'Time at temperature',
+              ...truth.cycles.map(({ minutes }) => `${figure(hand, minutes ?? 0)} min`),
+            ],
           ],
-          ['Start', ...truth.cycles.map(({ soak_start }) => moment(hand, soak_start ?? ''))],
-          ['End', ...truth.cycles.map(({ soak_end }) => moment(hand, soak_end ?? ''))],
-          ['Time at temperature', ...truth.cycles.map(({ minutes }) => `${figure(hand, minutes ?? 0)} min`)],
-        ],
-        50,
-        495,
+        },
+        [50, 495],
         { rules: 'horizontal' },
       );
     else
@@ -231,7 +244,7 @@ const processRecord: Layout = {
     );
     paper.y += 40;
     if (truth.signature_present) paper.sign(60, paper.y - 6, dice.whole(100, 9000));
-    paper.rule(50, paper.y, 220, paper.y);
+    paper.rule([50, paper.y], [220, paper.y]);
     paper.text(`for and on behalf of ${truth.processor ?? ''}`, 50, paper.y + 12, { size: 8 });
     paper.text(`${story.signer} (${story.signerTitle})`, 50, paper.y + 26);
     return paper.save();
@@ -304,10 +317,11 @@ const shippingStyle: Layout = {
     paper.y = 36;
     table(
       paper,
-      ['CERT NO', 'DATE', 'PAGE'],
-      [[truth.certificate_number ?? '', hand.day(truth.certificate_date ?? ''), '1 OF 1']],
-      370,
-      200,
+      {
+        heads: ['CERT NO', 'DATE', 'PAGE'],
+        rows: [[truth.certificate_number ?? '', hand.day(truth.certificate_date ?? ''), '1 OF 1']],
+      },
+      [370, 200],
       { rules: 'all', headSize: 7 },
     );
     paper.y = 104;
@@ -324,18 +338,19 @@ const shippingStyle: Layout = {
     paper.y = 162;
     table(
       paper,
-      ['CUSTOMER P.O.', 'BATCH', 'OUR ORDER', 'DATE RECEIVED', 'SHIP VIA'],
-      [
-        [
-          truth.purchase_order ?? '',
-          truth.batch ?? '',
-          `S${dice.whole(1000, 9999)}`,
-          hand.day(story.order.dispatched ?? ''),
-          'OUR TRUCK',
+      {
+        heads: ['CUSTOMER P.O.', 'BATCH', 'OUR ORDER', 'DATE RECEIVED', 'SHIP VIA'],
+        rows: [
+          [
+            truth.purchase_order ?? '',
+            truth.batch ?? '',
+            `S${dice.whole(1000, 9999)}`,
+            hand.day(story.order.dispatched ?? ''),
+            'OUR TRUCK',
+          ],
         ],
-      ],
-      40,
-      532,
+      },
+      [40, 532],
       { rules: 'all', headSize: 7, align: 'centre' },
     );
     paper.text(`PROCESS: ${DONE[truth.process ?? ''] ?? ''}`, 40, paper.y);
@@ -350,7 +365,7 @@ const shippingStyle: Layout = {
     ['PART NUMBER', 'REV', 'MATERIAL', 'LOT', 'QTY ACC', 'QTY REJ'].forEach((head, index) =>
       paper.text(head, (edges[index] ?? 0) + 3, top + 9, { size: 7, bold: true }),
     );
-    paper.rule(40, top + 13, 572, top + 13);
+    paper.rule([40, top + 13], [572, top + 13]);
     paper.y = top + 26;
     for (const line of truth.lines) {
       const [first = '', ...others] = (line.material ?? '').split(' ');
@@ -365,7 +380,7 @@ const shippingStyle: Layout = {
       paper.text(others.join(' '), (edges[2] ?? 0) + 3, paper.y + 11);
       paper.y += 28;
     }
-    paper.rule(40, paper.y - 10, 572, paper.y - 10);
+    paper.rule([40, paper.y - 10], [572, paper.y - 10]);
     paper.text('TOTAL', (edges[3] ?? 0) + 3, paper.y + 2, { bold: true });
     paper.text(
       String(truth.lines.reduce((sum, line) => sum + (line.qty_accepted ?? 0), 0)),
@@ -405,7 +420,7 @@ const shippingStyle: Layout = {
     });
     paper.y += 24;
     paper.text(truth.signature_present ? `/s/ ${story.signer}` : '', 50, paper.y);
-    paper.rule(40, paper.y + 4, 240, paper.y + 4);
+    paper.rule([40, paper.y + 4], [240, paper.y + 4]);
     paper.text('AUTHORIZED BY', 40, paper.y + 13, { size: 7 });
     paper.text(`TITLE: ${story.signerTitle.toUpperCase()}`, 300, paper.y + 4);
     return paper.save();

@@ -23,12 +23,12 @@ export function signatureBlock(paper: Paper, { story, dice }: Told, x: number): 
   const above = dice.chance(0.5);
   if (truth.signature_present) paper.sign(x + (above ? 14 : 110), paper.y - 2, dice.whole(10, 9999));
   if (above) {
-    paper.rule(x, paper.y, x + 210, paper.y);
+    paper.rule([x, paper.y], [x + 210, paper.y]);
     paper.text(words, x, paper.y + 11, { size: 8.5 });
     paper.y += 26;
   } else {
     paper.text(`${words}:`, x, paper.y);
-    paper.rule(x + 105, paper.y + 1, x + 280, paper.y + 1);
+    paper.rule([x + 105, paper.y + 1], [x + 280, paper.y + 1]);
     paper.y += 20;
   }
   paper.text(dice.chance(0.5) ? `${signer}, ${signerTitle}` : `Name: ${signer}`, x, paper.y);

@@ -56,7 +56,7 @@ const letter: Layout = {
       paper.y += 8;
     }
     const parts = partsGrid(told, false);
-    table(paper, parts.heads, parts.rows, 50, 500, { rules: 'none' });
+    table(paper, parts, [50, 500], { rules: 'none' });
     paper.prose(statement(told), 50, 500);
     paper.y += 50;
     signatureBlock(paper, told, 50);
@@ -72,13 +72,12 @@ const boxedForm: Layout = {
     const paper = await Paper.open('Helvetica', 10, LETTER);
     letterhead(paper, told, 'centre');
     title(paper, 'CERTIFICATE OF CONFORMANCE');
-    cards(paper, headPairs(told), 40, 530, { columns: 3, framed: true });
+    cards(paper, headPairs(told), [40, 530], { columns: 3, framed: true });
     const parts = partsGrid(told);
-    table(paper, parts.heads, parts.rows, 40, 530, { rules: 'all', shaded: true });
+    table(paper, parts, [40, 530], { rules: 'all', shaded: true });
     const cycles = cyclesGrid(told);
-    if (cycles.rows.length > 0)
-      table(paper, cycles.heads, cycles.rows, 40, 530, { rules: 'all', shaded: true });
-    cards(paper, [...furnacePairs(told), ...readingPairs(told)], 40, 530, { columns: 2, framed: true });
+    if (cycles.rows.length > 0) table(paper, cycles, [40, 530], { rules: 'all', shaded: true });
+    cards(paper, [...furnacePairs(told), ...readingPairs(told)], [40, 530], { columns: 2, framed: true });
     paper.prose(statement(told), 44, 520);
     paper.y += 40;
     signatureBlock(paper, told, 44);
@@ -94,15 +93,14 @@ const denseTable: Layout = {
     const paper = await Paper.open('Helvetica', 8, LETTER);
     letterhead(paper, told, 'left');
     title(paper, `${told.story.work.title.toUpperCase()} CERTIFICATION`, 'left');
-    twoColumns(paper, headPairs(told), 50, 260, { labelWidth: 105, mark: ':', boldLabel: true });
+    twoColumns(paper, headPairs(told), 50, { columnWidth: 260, labelWidth: 105, mark: ':', boldLabel: true });
     paper.y += 10;
     const parts = partsGrid(told);
-    table(paper, parts.heads, parts.rows, 50, 510, { rules: 'all', align: 'centre' });
+    table(paper, parts, [50, 510], { rules: 'all', align: 'centre' });
     const cycles = cyclesGrid(told);
-    if (cycles.rows.length > 0)
-      table(paper, cycles.heads, cycles.rows, 50, 510, { rules: 'all', align: 'centre' });
+    if (cycles.rows.length > 0) table(paper, cycles, [50, 510], { rules: 'all', align: 'centre' });
     const readings = readingsGrid(told);
-    if (readings.rows.length > 0) table(paper, readings.heads, readings.rows, 50, 510, { rules: 'all' });
+    if (readings.rows.length > 0) table(paper, readings, [50, 510], { rules: 'all' });
     pairs(paper, furnacePairs(told), 50, { labelWidth: 120, mark: ':' });
     paper.y += 8;
     paper.prose(statement(told), 50, 510);
@@ -119,13 +117,14 @@ const landscape: Layout = {
     const paper = await Paper.open('Helvetica', 10, [792, 612]);
     letterhead(paper, told, 'centre');
     title(paper, 'Certificate of Compliance');
-    twoColumns(paper, headPairs(told), 60, 350, { labelWidth: 150, mark: '' });
+    twoColumns(paper, headPairs(told), 60, { columnWidth: 350, labelWidth: 150, mark: '' });
     paper.y += 6;
     const parts = partsGrid(told);
-    table(paper, parts.heads, parts.rows, 60, 670, { rules: 'horizontal' });
+    table(paper, parts, [60, 670], { rules: 'horizontal' });
     const cycles = cyclesGrid(told);
-    if (cycles.rows.length > 0) table(paper, cycles.heads, cycles.rows, 60, 670, { rules: 'horizontal' });
-    twoColumns(paper, [...furnacePairs(told), ...readingPairs(told)], 60, 350, {
+    if (cycles.rows.length > 0) table(paper, cycles, [60, 670], { rules: 'horizontal' });
+    twoColumns(paper, [...furnacePairs(told), ...readingPairs(told)], 60, {
+      columnWidth: 350,
       labelWidth: 150,
       mark: ':',
     });
@@ -149,7 +148,7 @@ const twoPages: Layout = {
     pairs(paper, headPairs(told), 50, { labelWidth: 170, mark: ':' });
     paper.y += 10;
     const parts = partsGrid(told);
-    table(paper, parts.heads, parts.rows, 50, 510, { rules: 'horizontal', shaded: true });
+    table(paper, parts, [50, 510], { rules: 'horizontal', shaded: true });
     paper.turnPage();
     paper.text(told.story.truth.processor ?? '', 50, 44, { bold: true });
     paper.text(`Certificate No. ${told.story.truth.certificate_number ?? ''}`, 50, 58);
@@ -184,7 +183,7 @@ const typewriter: Layout = {
     pairs(paper, headPairs(told), 60, { labelWidth: 230, mark: '....' });
     paper.y += 8;
     const parts = partsGrid(told, false);
-    table(paper, parts.heads, parts.rows, 46, 520, { rules: 'none', headSize: 9 });
+    table(paper, parts, [46, 520], { rules: 'none', headSize: 9 });
     pairs(paper, [...cyclePairs(told), ...furnacePairs(told), ...readingPairs(told)], 60, {
       labelWidth: 270,
       mark: '....',
@@ -207,9 +206,9 @@ const german: Layout = {
     pairs(paper, headPairs(told), 50, { labelWidth: 190, mark: ':' });
     paper.y += 8;
     const parts = partsGrid(told);
-    table(paper, parts.heads, parts.rows, 50, 495, { rules: 'all' });
+    table(paper, parts, [50, 495], { rules: 'all' });
     const cycles = cyclesGrid(told);
-    if (cycles.rows.length > 0) table(paper, cycles.heads, cycles.rows, 50, 495, { rules: 'all' });
+    if (cycles.rows.length > 0) table(paper, cycles, [50, 495], { rules: 'all' });
     pairs(paper, [...furnacePairs(told), ...readingPairs(told)], 50, { labelWidth: 190, mark: ':' });
     paper.y += 8;
     paper.prose(statement(told), 50, 490);
@@ -228,12 +227,12 @@ const frenchCards: Layout = {
     letterhead(paper, told, 'banner');
     paper.y += 10;
     title(paper, 'Certificat de conformité', 'left');
-    cards(paper, headPairs(told), 46, 500, { columns: 2, framed: false, height: 34 });
+    cards(paper, headPairs(told), [46, 500], { columns: 2, framed: false, height: 34 });
     const parts = partsGrid(told);
-    table(paper, parts.heads, parts.rows, 50, 495, { rules: 'horizontal' });
+    table(paper, parts, [50, 495], { rules: 'horizontal' });
     const cycles = cyclesGrid(told);
-    if (cycles.rows.length > 0) table(paper, cycles.heads, cycles.rows, 50, 495, { rules: 'horizontal' });
-    cards(paper, [...furnacePairs(told), ...readingPairs(told)], 46, 500, {
+    if (cycles.rows.length > 0) table(paper, cycles, [50, 495], { rules: 'horizontal' });
+    cards(paper, [...furnacePairs(told), ...readingPairs(told)], [46, 500], {
       columns: 3,
       framed: false,
       height: 34,
@@ -253,10 +252,10 @@ const british: Layout = {
     const paper = await Paper.open('Times', 10.5, A4);
     letterhead(paper, told, 'centre');
     title(paper, 'RELEASE CERTIFICATE');
-    twoColumns(paper, headPairs(told), 50, 255, { labelWidth: 125, mark: ':' });
+    twoColumns(paper, headPairs(told), 50, { columnWidth: 255, labelWidth: 125, mark: ':' });
     paper.y += 8;
     const parts = partsGrid(told, false);
-    table(paper, parts.heads, parts.rows, 50, 495, { rules: 'horizontal', align: 'centre' });
+    table(paper, parts, [50, 495], { rules: 'horizontal', align: 'centre' });
     if (told.story.truth.cycles.length > 0) heading(paper, 'Furnace record', 50);
     inlinePairs(paper, [...cyclePairs(told), ...furnacePairs(told)], 50, ':');
     if (told.story.truth.readings.length > 0) heading(paper, 'Test results', 50);
@@ -281,25 +280,21 @@ const horizontalRules: Layout = {
       const some = head.slice(at, at + 5);
       table(
         paper,
-        some.map(({ label }) => label),
-        [some.map(({ value }) => value)],
-        40,
-        532,
+        { heads: some.map(({ label }) => label), rows: [some.map(({ value }) => value)] },
+        [40, 532],
         { rules: 'horizontal', headSize: 8 },
       );
     }
     const parts = partsGrid(told);
-    table(paper, parts.heads, parts.rows, 40, 532, { rules: 'horizontal' });
+    table(paper, parts, [40, 532], { rules: 'horizontal' });
     const cycles = cyclesGrid(told);
-    if (cycles.rows.length > 0) table(paper, cycles.heads, cycles.rows, 40, 532, { rules: 'horizontal' });
+    if (cycles.rows.length > 0) table(paper, cycles, [40, 532], { rules: 'horizontal' });
     const others = [...furnacePairs(told), ...readingPairs(told)];
     if (others.length > 1)
       table(
         paper,
-        others.map(({ label }) => label),
-        [others.map(({ value }) => value)],
-        40,
-        532,
+        { heads: others.map(({ label }) => label), rows: [others.map(({ value }) => value)] },
+        [40, 532],
         { rules: 'horizontal' },
       );
     else pairs(paper, others, 44, { labelWidth: 140, mark: ':' });
@@ -321,7 +316,7 @@ const laboratory: Layout = {
     inlinePairs(paper, headPairs(told), 50, ':');
     const parts = partsGrid(told);
     paper.y += 4;
-    table(paper, parts.heads, parts.rows, 50, 510, { rules: 'all', align: 'right' });
+    table(paper, parts, [50, 510], { rules: 'all', align: 'right' });
     for (const { label, value } of cyclePairs(told)) {
       paper.text(`${label}: ${value}`, 50, paper.y);
       paper.y += 14;
@@ -329,8 +324,7 @@ const laboratory: Layout = {
     pairs(paper, furnacePairs(told), 50, { labelWidth: 120, mark: '=' });
     paper.y += 6;
     const readings = readingsGrid(told);
-    if (readings.rows.length > 0)
-      table(paper, readings.heads, readings.rows, 50, 510, { rules: 'horizontal' });
+    if (readings.rows.length > 0) table(paper, readings, [50, 510], { rules: 'horizontal' });
     paper.prose(statement(told), 50, 510);
     paper.y += 44;
     signatureBlock(paper, told, 300);

@@ -65,10 +65,8 @@ export async function makeCertificate(
 }
 
 function tell(layout: Layout, dice: Dice, count: number): { told: Told; planted: string[] } {
-  const hand: Hand =
-    layout.hand === 'american'
-      ? americanHand(dice)
-      : europeanHand(dice, layout.hand === 'british' ? 'en' : layout.hand === 'german' ? 'de' : 'fr');
+  const language = ({ american: 'en', british: 'en', german: 'de', french: 'fr' } as const)[layout.hand];
+  const hand: Hand = layout.hand === 'american' ? americanHand(dice) : europeanHand(dice, language);
   const { story, planted } = plantIn(tellStory(dice), dice, count);
   return { told: { story: asPrinted(story, hand, dice), hand, dice }, planted };
 }

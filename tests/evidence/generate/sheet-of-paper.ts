@@ -8,6 +8,8 @@ const FACES: Record<Face, readonly [StandardFonts, StandardFonts]> = {
   Courier: [StandardFonts.Courier, StandardFonts.CourierBold],
 };
 
+type Point = readonly [number, number];
+
 export interface TextStyle {
   readonly size?: number;
   readonly bold?: boolean;
@@ -18,16 +20,19 @@ export interface TextStyle {
 /** A PDF being written from top to bottom; places are in points from the upper left corner. */
 export class Paper {
   private page: PDFPage;
+  readonly width: number;
+  readonly height: number;
   y = 0;
 
   private constructor(
     private readonly document: PDFDocument,
     private readonly fonts: readonly [PDFFont, PDFFont],
-    readonly width: number,
-    readonly height: number,
+    [width, height]: Point,
     readonly size: number,
   ) {
-    this.page = document.addPage([width, height]);
+    this.width = width;
+    this.height = height;
+    this.page = document.addPage([this.width, this.height]);
   }
 
   static async open(face: Face, size: number, [width, height]: readonly [number, number]): Promise<Paper> {
@@ -39,8 +44,7 @@ export class Paper {
     return new Paper(
       document,
       [await document.embedFont(plain), await document.embedFont(bold)],
-      width,
-      height,
+      [width, height],
       size,
     );
   }
@@ -58,7 +62,7 @@ export class Paper {
   text(text: string, x: number, y: number, style: TextStyle = {}): void {
     const { size = this.size, bold = false, align = 'left', grey = 0 } = style;
     const wide = this.widthOf(text, style);
-    const left = align === 'left' ? x : align === 'right' ? x - wide : x - wide / 2;
+    const left = { left: x, right: x - wide, centre: x - wide / 2 }[align];
     this.page.drawText(text, {
       x: left,
       y: this.height - y,
@@ -84,7 +88,7 @@ export class Paper {
     this.y += size * 1.3;
   }
 
-  rule(x1: number, y1: number, x2: number, y2: number, thickness = 0.6): void {
+  rule([x1, y1]: Point, [x2, y2]: Point, thickness = 0.6): void {
     this.page.drawLine({
       start: { x: x1, y: this.height - y1 },
       end: { x: x2, y: this.height - y2 },

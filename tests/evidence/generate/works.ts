@@ -52,7 +52,11 @@ const NOTHING = {
   readings: [],
 };
 
-const around = (dice: Dice, low: number, high: number, digits: number, count: number): number[] =>
+const around = (
+  dice: Dice,
+  [low, high]: readonly [number, number],
+  { digits, count }: { readonly digits: number; readonly count: number },
+): number[] =>
   Array.from(
     { length: count },
     () => Math.round((low + ((high - low) * dice.whole(0, 100)) / 100) * 10 ** digits) / 10 ** digits,
@@ -112,12 +116,12 @@ function solutionAndAge(dice: Dice): Work {
           {
             kind: 'hardness',
             unit: 'HRB',
-            values: around(more, hardness[0], hardness[1], 1, more.whole(2, 4)),
+            values: around(more, [hardness[0], hardness[1]], { digits: 1, count: more.whole(2, 4) }),
           },
           {
             kind: 'conductivity',
             unit: '%IACS',
-            values: around(more, iacs[0], iacs[1], 1, more.whole(1, 3)),
+            values: around(more, [iacs[0], iacs[1]], { digits: 1, count: more.whole(1, 3) }),
           },
         ],
       };
@@ -146,7 +150,13 @@ function hardenAndTemper(dice: Dice): Work {
           cycle('austenitize', 1575, start, soak),
           cycle('temper', temper, minutesAfter(start, soak + 70), more.pick([120, 150])),
         ],
-        readings: [{ kind: 'hardness', unit: 'HRC', values: around(more, 28, 36, 1, more.whole(2, 5)) }],
+        readings: [
+          {
+            kind: 'hardness',
+            unit: 'HRC',
+            values: around(more, [28, 36], { digits: 1, count: more.whole(2, 5) }),
+          },
+        ],
       };
     },
   };
@@ -170,13 +180,15 @@ function stressRelief(): Work {
   };
 }
 
-function plate(
-  process: 'cadmium_plate' | 'zinc_plate',
-  title: string,
-  spec: string,
-  revision: string,
-  classType: string,
-) {
+type Ordered = Pick<Work, 'title' | 'spec' | 'revision' | 'classType'>;
+
+function plate({
+  process,
+  title,
+  spec,
+  revision,
+  classType,
+}: Ordered & { readonly process: 'cadmium_plate' | 'zinc_plate' }) {
   return (): Work => ({
     process,
     trade: 'finishing',
@@ -202,21 +214,25 @@ function plate(
         bake_start: bake.soak_start,
         bake_end: bake.soak_end,
         readings: [
-          { kind: 'thickness', unit: 'microinch', values: around(more, 320, 470, 0, more.whole(2, 5)) },
+          {
+            kind: 'thickness',
+            unit: 'microinch',
+            values: around(more, [320, 470], { digits: 0, count: more.whole(2, 5) }),
+          },
         ],
       };
     },
   });
 }
 
-function treat(
-  process: string,
-  title: string,
-  spec: string,
-  revision: string,
-  classType: string,
-  material: string,
-) {
+function treat({
+  process,
+  title,
+  spec,
+  revision,
+  classType,
+  material,
+}: Ordered & Pick<Work, 'process' | 'material'>) {
   return (): Work => ({
     process,
     trade: /penetrant|particle/.test(process) ? 'inspection' : 'finishing',
@@ -239,26 +255,65 @@ export const WORKS: readonly ((dice: Dice) => Work)[] = [
   hardenAndTemper,
   hardenAndTemper,
   stressRelief,
-  plate('cadmium_plate', 'Cadmium Plating', 'AMS-QQ-P-416', 'F', 'Type II Class 2'),
-  plate('cadmium_plate', 'Cadmium Plating', 'AMS-QQ-P-416', 'F', 'Type II Class 2'),
-  plate('zinc_plate', 'Zinc Plating', 'ASTM B633', '19', 'Type II SC 3'),
-  treat('anodize', 'Anodize', 'MIL-PRF-8625', 'F', 'Type II Class 1', '6061-T6 PLATE'),
-  treat('chemical_film', 'Chemical Film', 'MIL-DTL-5541', 'F', 'Type I Class 1A', '2024-T3 SHEET'),
-  treat('passivation', 'Passivation', 'AMS 2700', 'G', 'Method 1 Type 2 Class 1', '17-4PH BAR'),
-  treat(
-    'fluorescent_penetrant',
-    'Fluorescent Penetrant Inspection',
-    'ASTM E1417',
-    '21',
-    'Type I Method A Level 2',
-    '7075-T73 FORGING',
-  ),
-  treat(
-    'magnetic_particle',
-    'Magnetic Particle Inspection',
-    'ASTM E1444',
-    '22',
-    'wet continuous fluorescent',
-    '4130 STEEL',
-  ),
+  plate({
+    process: 'cadmium_plate',
+    title: 'Cadmium Plating',
+    spec: 'AMS-QQ-P-416',
+    revision: 'F',
+    classType: 'Type II Class 2',
+  }),
+  plate({
+    process: 'cadmium_plate',
+    title: 'Cadmium Plating',
+    spec: 'AMS-QQ-P-416',
+    revision: 'F',
+    classType: 'Type II Class 2',
+  }),
+  plate({
+    process: 'zinc_plate',
+    title: 'Zinc Plating',
+    spec: 'ASTM B633',
+    revision: '19',
+    classType: 'Type II SC 3',
+  }),
+  treat({
+    process: 'anodize',
+    title: 'Anodize',
+    spec: 'MIL-PRF-8625',
+    revision: 'F',
+    classType: 'Type II Class 1',
+    material: '6061-T6 PLATE',
+  }),
+  treat({
+    process: 'chemical_film',
+    title: 'Chemical Film',
+    spec: 'MIL-DTL-5541',
+    revision: 'F',
+    classType: 'Type I Class 1A',
+    material: '2024-T3 SHEET',
+  }),
+  treat({
+    process: 'passivation',
+    title: 'Passivation',
+    spec: 'AMS 2700',
+    revision: 'G',
+    classType: 'Method 1 Type 2 Class 1',
+    material: '17-4PH BAR',
+  }),
+  treat({
+    process: 'fluorescent_penetrant',
+    title: 'Fluorescent Penetrant Inspection',
+    spec: 'ASTM E1417',
+    revision: '21',
+    classType: 'Type I Method A Level 2',
+    material: '7075-T73 FORGING',
+  }),
+  treat({
+    process: 'magnetic_particle',
+    title: 'Magnetic Particle Inspection',
+    spec: 'ASTM E1444',
+    revision: '22',
+    classType: 'wet continuous fluorescent',
+    material: '4130 STEEL',
+  }),
 ];

@@ -20,18 +20,9 @@ const plain = (value: unknown): string | null =>
 
 /** Each field of a certificate beside what was written on it. */
 export function judge(truth: Truth, read: StatedCertificate): Judged[] {
-  const one = (field: string, expected: unknown, found: unknown, path = field): Judged => {
+  const one: One = (field, expected, found, path = field) => {
     const [a, b] = [plain(expected), plain(found)];
-    const outcome =
-      a === b
-        ? a === null
-          ? 'rightly_null'
-          : 'right'
-        : a === null
-          ? 'invented'
-          : b === null
-            ? 'missed'
-            : 'wrong';
+    const outcome = outcomeOf(a, b);
     return {
       field,
       path,
@@ -63,6 +54,12 @@ export function judge(truth: Truth, read: StatedCertificate): Judged[] {
     ...cyclesOf(truth, read, one),
     ...readingsOf(truth, read, one),
   ];
+}
+
+function outcomeOf(truth: string | null, read: string | null): Judged['outcome'] {
+  if (truth === null) return read === null ? 'rightly_null' : 'invented';
+  if (read === null) return 'missed';
+  return truth === read ? 'right' : 'wrong';
 }
 
 type One = (field: string, expected: unknown, found: unknown, path?: string) => Judged;

@@ -4,6 +4,7 @@ import { statedIn } from '@/lib/evidence/certificate/read/read-certificate';
 import { openFile } from '@/lib/evidence/open/open-file';
 import { makeRecogniser } from '@/lib/evidence/open/recogniser';
 import { HELD_OUT_LAYOUTS } from '../generate/held-out-layouts';
+import { SECOND_HELD_OUT_LAYOUTS } from '../generate/held-out-layouts-2';
 import { LAYOUTS } from '../generate/layouts';
 import { KINDS, makeCertificate, type Kind, type MadeCertificate } from '../generate/make-certificate';
 import { judge } from './compare-with-truth';
@@ -13,7 +14,7 @@ import { Tally } from './tally';
  * Reads generated certificates and prints how well.
  *
  * `--kind text,scan,scan150,photo` which kinds of file; `--count 72` how many of each; `--from 0` the first seed;
- * `--layouts usual|held-out`; `--verbose` names every field that was not read as it was written.
+ * `--layouts usual|first|second` the layouts the rules were made with, or those written after them; `--verbose` names every field that was not read as it was written.
  */
 const { values: options } = parseArgs({
   options: {
@@ -25,7 +26,8 @@ const { values: options } = parseArgs({
   },
 });
 
-const layouts = options.layouts === 'held-out' ? HELD_OUT_LAYOUTS : LAYOUTS;
+const SETS = { usual: LAYOUTS, first: HELD_OUT_LAYOUTS, second: SECOND_HELD_OUT_LAYOUTS } as const;
+const layouts = Object.entries(SETS).find(([name]) => name === options.layouts)?.[1] ?? LAYOUTS;
 const kinds = KINDS.filter((kind) => options.kind.split(',').includes(kind));
 const recogniser = makeRecogniser();
 const whole = new Tally();

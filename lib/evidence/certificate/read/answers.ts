@@ -57,17 +57,19 @@ export function answersOf(sheets: readonly Sheet[]): Answer[] {
         row: null,
         marked: label.marked,
       })),
-      ...sheet.tables.flatMap((table, index) => answersIn(table, `${sheet.page}.${index}`)),
+      ...sheet.tables.flatMap((table, index) =>
+        answersIn(table, `${sheet.page}.${index}`, sheet.sections[index] ?? null),
+      ),
     ])
     .sort((a, b) => a.order - b.order);
 }
 
 type LabelTable = Table<FoundLabel>;
 
-function answersIn(table: LabelTable, name: string): Answer[] {
+function answersIn(table: LabelTable, name: string, section: Step | null): Answer[] {
   return table.rows.flatMap((row, index) => {
     const order = table.page * 1e6 + table.from * 1000 + (index + 1) * 50;
-    const from = { table, row, name: `${name}.${index}`, order };
+    const from = { table, row, name: `${name}.${index}`, order, section };
     return rowLabelled(from) ?? byColumn(from);
   });
 }
@@ -77,6 +79,7 @@ interface RowPlace {
   readonly row: Row;
   readonly name: string;
   readonly order: number;
+  readonly section: Step | null;
 }
 
 /** Columns that a row's own label asks for: what was found, not what was required. */
@@ -87,12 +90,12 @@ const ASIDE: ReadonlySet<LabelKey> = new Set(['requirement', 'verdict', 'remarks
  * Answers of a row that begins with its own label: "Hardness | 63 min | 69.0", or "Temperature | 920 °F | 350 °F" under
  * two steps. Null where the columns' headings are the labels.
  */
-function rowLabelled({ table, row, name, order }: RowPlace): Answer[] | null {
+function rowLabelled({ table, row, name, order, section }: RowPlace): Answer[] | null {
   const headings = table.columns.map(({ heading }) => heading);
   const results = headings.flatMap((heading, index) => (heading && FOUND.has(heading.key) ? [index] : []));
   const steps = headings.flatMap((heading, index) => (index > 0 && heading?.step ? [index] : []));
   const places = headings.flatMap((heading, index) => (heading?.key === 'specimen' ? [index] : []));
-  const asks = results.length > 0 ? results : steps.length > 1 ? steps : places.length > 1 ? places : [];
+  const asks = results.length > 0 ? results : ([steps, places].find(({ length }) => length > 1) ?? []);
   const first = row.cells.findIndex(
     (cell, index) => cell !== null && !/^\d{1,2}\.?$/.test(cell.text) && !asks.includes(index),
   );
@@ -116,7 +119,7 @@ function rowLabelled({ table, row, name, order }: RowPlace): Answer[] | null {
         qualifier:
           `${label.qualifier} ${words.slice(label.end)} ${headings[column]?.qualifier ?? ''} ${aside}`.trim(),
         step: headings[column]?.step ?? label.step ?? step?.step ?? null,
-        section: null,
+        section,
         values: [{ passage: cell, how: 'column' as const }],
         order: order + turn,
         page: table.page,
@@ -128,7 +131,7 @@ function rowLabelled({ table, row, name, order }: RowPlace): Answer[] | null {
   });
 }
 
-function byColumn({ table, row, name, order }: RowPlace): Answer[] {
+function byColumn({ table, row, name, order, section }: RowPlace): Answer[] {
   const namedBy = row.cells.find(
     (cell, index) => cell !== null && namesStep(cell, table.columns[index]?.heading ?? null),
   );
@@ -145,7 +148,7 @@ function byColumn({ table, row, name, order }: RowPlace): Answer[] {
         also: heading.also,
         qualifier: `${heading.qualifier} ${aside}`.trim(),
         step: heading.step ?? (cell === namedBy ? null : (named?.step ?? null)),
-        section: null,
+        section,
         values: [{ passage: cell, how: 'column' }],
         order: order + index,
         page: table.page,

@@ -77,13 +77,8 @@ function dayAlone(paper: Paper, segment: Passage, down: number): Candidate<strin
   if (!spot || ANOTHER.test(before) || /\d:\d\d/.test(segment.text)) return [];
   const alone =
     before.replace(/^[^,]{0,30},\s*$/, '').trim().length < 3 && segment.text.length - found.end < 3;
-  const trust = alone
-    ? down < 0.45
-      ? 0.75
-      : 0.5
-    : /\b(?:dated|date|issued|certified|signed)\b[^.]{0,20}$/i.test(before)
-      ? 0.7
-      : 0;
+  const said = /\b(?:dated|date|issued|certified|signed)\b[^.]{0,20}$/i.test(before) ? 0.7 : 0;
+  const trust = alone && down < 0.45 ? 0.75 : Math.max(said, alone ? 0.5 : 0);
   return trust > 0 ? [{ value: dayOf(found, paper.dayOrder), spot, trust }] : [];
 }
 

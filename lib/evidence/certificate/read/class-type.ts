@@ -112,7 +112,8 @@ const roman = (numeral: string): string =>
     ? numeral.replace(/[l1|]/g, 'I')
     : numeral.replace(/^[l|]$/, 'I');
 
-function designation(text: string): string | null {
+/** Type, class, method, level and the like in a text, as one. */
+export function designation(text: string): string | null {
   DESIGNATION.lastIndex = 0;
   const match = DESIGNATION.exec(text);
   return match && spelled(match[0]);

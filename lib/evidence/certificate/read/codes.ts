@@ -87,7 +87,7 @@ export function partIn(passage: Passage, isDate: (text: string) => boolean): Rea
   const code = answersOther(passage.text) ? null : codeIn(passage, isDate);
   if (!code) return null;
   const at = passage.text.replace(/–/g, '-').indexOf(code.spot.raw.replace(/–/g, '-'));
-  const glued = /^(.{3,}[\dA-Z])\/([A-Z])$/.exec(code.value);
+  const glued = /^(.{3,}[\dA-Z])(?:\/|-?rev\.?)([A-Z])$/i.exec(code.value);
   const part = glued?.[1] ?? code.value;
   // 3 characters: less is a line's number.
   if (part.replace(/[^A-Z0-9]/gi, '').length < 3) return null;
@@ -95,7 +95,7 @@ export function partIn(passage: Passage, isDate: (text: string) => boolean): Rea
   const [, said] = REVISION.exec(after) ?? [];
   const [, stroke, apart] = SHORT_REVISION.exec(after) ?? [];
   return {
-    value: { part, rev: glued?.[2] ?? said?.toUpperCase() ?? stroke ?? apart ?? null },
+    value: { part, rev: glued?.[2]?.toUpperCase() ?? said?.toUpperCase() ?? stroke ?? apart ?? null },
     spot: code.spot,
   };
 }

@@ -54,12 +54,9 @@ export function cycleAttributesIn(
     return moment && spot ? { moment, spot } : null;
   };
   const start = asked !== null && END_KEYS.has(asked) ? null : at(first && withDayNearby(first, moments));
-  const end =
-    asked !== null && END_KEYS.has(asked)
-      ? at(first)
-      : second && (asked === null || !START_KEYS.has(asked))
-        ? at(withDayNearby(second, moments))
-        : null;
+  const endOfBoth =
+    second && (asked === null || !START_KEYS.has(asked)) ? at(withDayNearby(second, moments)) : null;
+  const end = asked !== null && END_KEYS.has(asked) ? at(first) : endOfBoth;
   const paired = asked !== null || end !== null ? start : null;
   return {
     ...(temperature && { temperature }),

@@ -220,7 +220,7 @@ function take(
     const unit = temperature.unit ?? usualUnit(paper, temperature.value);
     if (unit) cycle.unit = unit;
   }
-  if (minutes) cycle.minutes ??= { value: Math.round(minutes.value * 100) / 100, spot: minutes.spot, trust };
+  if (minutes) cycle.minutes ??= { value: Math.round(minutes.value * 10) / 10, spot: minutes.spot, trust };
   const moment = (found: { moment: FoundMoment; spot: Spot } | undefined): ReadValue<string> | undefined => {
     if (!found) return undefined;
     const day = found.moment.day ? dayOf(found.moment.day, paper.dayOrder) : days.at(row, order);

@@ -125,8 +125,8 @@ function inFigures(first: string, second: string, year: string, sign: string): R
   // Nobody parts month, day and year by full stops.
   if (sign === '.' && dayFirst !== null) return { dayFirst, monthFirst: dayFirst, shows: 'day_first' };
   if (dayFirst === monthFirst) return { dayFirst, monthFirst, shows: null };
-  const shows = monthFirst === null ? 'day_first' : dayFirst === null ? 'month_first' : null;
-  return { dayFirst, monthFirst, shows };
+  if (monthFirst === null) return { dayFirst, monthFirst, shows: 'day_first' };
+  return { dayFirst, monthFirst, shows: dayFirst === null ? 'month_first' : null };
 }
 
 function calendarDay(year: number, month: number, day: number): string | null {

@@ -82,12 +82,13 @@ const LEAD = /^\s*(?:\d{1,2}[.)]\s*|[a-z]\)\s*|\(\s*[\da-z]{1,2}\s*\)\s*|[•*�
 const MARK = /^\s*(?:[.·…_]{2,}\s*:?|(?:\s\.){2,}\s*:?|[:;=]+|\s[-–—]+\s|[-–—]>|»|\|)\s*(?:[.·…_]{3,}\s*)?/;
 
 const UNIT =
-  /^[,\s]*(?:\(([^()]{1,40})\)|\[([^[\]]{1,40})\]|((?:in\s+)?(?:°\s?[FC]|deg\.?\s?[FC]|[FC]|HR(?:[A-H]|15T|30T|15N|30N|45N)W?|HV\s?\d{0,2}|HBW?|%\s?IACS|IACS|MS\/m|µ-?in|μ-?in|uin|microinch(?:es)?|mils?|µm|μm|um|mm|inch(?:es)?|ksi|MPa|min|mins|minutes|hrs?|hours|h|sec|seconds|s|pcs|ea|%)\.?)(?=\s*(?:[:;=]|$)))/i;
+  /^[,\s]*(?:[({]([^(){}]{1,40})[)}]|\[([^[\]]{1,40})\]|((?:in\s+)?(?:°\s?[FC]|deg\.?\s?[FC]|[FC]|HR(?:[A-H]|15T|30T|15N|30N|45N)W?|HV\s?\d{0,2}|HBW?|%\s?IACS|IACS|MS\/m|µ-?in|μ-?in|uin|microinch(?:es)?|mils?|µm|μm|um|mm|inch(?:es)?|ksi|MPa|min|mins|minutes|hrs?|hours|h|sec|seconds|s|pcs|ea|%)\.?)(?=\s*(?:[:;=]|$)))/i;
 
 /** The label that a text begins with; null where it begins with none. */
 export function labelAtStart(text: string): FoundLabel | null {
   const lead = LEAD.exec(text)?.[0].length ?? 0;
-  return labelAt(text, folded(text), lead, true);
+  // Figures are folded into letters: "10:36" would begin with "i.O.".
+  return /[\p{L}#%]/u.test(text.charAt(lead)) ? labelAt(text, folded(text), lead, true) : null;
 }
 
 /**
@@ -111,8 +112,8 @@ export function labelsIn(text: string): FoundLabel[] {
 
 function labelAt(text: string, plain: string, at: number, first: boolean): FoundLabel | null {
   const bare = phraseAt(plain, at);
-  const stepped = bare && /\s/.test(plain.slice(at, bare.end)) ? null : steppedAt(text, plain, at);
-  const best = stepped ?? (bare ? { ...bare, step: null } : null);
+  const stepped = steppedAt(text, plain, at);
+  const best = stepped && stepped.end > (bare?.end ?? 0) ? stepped : bare && { ...bare, step: null };
   if (!best) return null;
   // "PO-5001" is a number and no question for one.
   if (/^-?\d|^[-/][\p{L}\d]/u.test(text.slice(best.end)) && !text.slice(at, best.end).endsWith('#'))
@@ -191,7 +192,7 @@ function tailOf(text: string, plain: string, from: number, key: LabelKey): Tail 
   let end = from + (/^\.(?![.\s]*\.)/.exec(text.slice(from))?.[0].length ?? 0);
   let qualifier = '';
   const also: LabelKey[] = [];
-  for (let turn = 0; turn < 3; turn += 1) {
+  for (let turn = 0; turn < 6; turn += 1) {
     const second = secondLabel(text, plain, end);
     if (second) {
       if (second.key && second.key !== key && !also.includes(second.key)) also.push(second.key);
@@ -202,10 +203,9 @@ function tailOf(text: string, plain: string, from: number, key: LabelKey): Tail 
     const [whole = '', inBrackets, inSquare, bare] = UNIT.exec(text.slice(end)) ?? [];
     if (whole === '') break;
     const words = inBrackets ?? inSquare ?? bare ?? '';
-    const within = inBrackets === undefined ? null : phraseAt(plain, end + text.slice(end).indexOf('(') + 1);
     // A value in brackets with digits in it is a value: "(12 pcs)".
     if (inBrackets !== undefined && /\d{2}/.test(inBrackets) && !/hr|hv|hb|mm/i.test(inBrackets)) break;
-    if (!within || /^(?:hr|hv|hb|%|iacs|min|h$|hrs)/i.test(words)) qualifier = `${qualifier} ${words}`.trim();
+    qualifier = `${qualifier} ${words}`.trim();
     end += whole.length;
   }
   const mark = MARK.exec(text.slice(end));
@@ -231,6 +231,9 @@ function secondLabel(
 function furtherWords(text: string, plain: string, from: number): { key: LabelKey; end: number } | null {
   const gap = /^[\s,]+/.exec(text.slice(from))?.[0].length ?? 0;
   const found = gap > 0 ? phraseAt(plain, from + gap) : null;
-  if (!found || !/^\.?\s*(?:$|[:;=(]|\.{3})/.test(text.slice(found.end))) return null;
-  return { key: found.phrase.key, end: found.end };
+  if (!found) return null;
+  const isLast = /^\.?\s*(?:$|[:;=(]|\.{3})/.test(text.slice(found.end));
+  const stop = text.charAt(found.end) === '.' ? 1 : 0;
+  if (!isLast && !furtherWords(text, plain, found.end + stop)) return null;
+  return { key: found.phrase.key, end: found.end + stop };
 }

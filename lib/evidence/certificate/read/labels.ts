@@ -7,7 +7,7 @@
 export const LABELS = {
   certificate_number: `cert no, cert of conformance no, cert of conformity no, cert of compliance no, conformance cert no,
     process cert no, heat treat cert no, test cert no, inspection cert no, cert ref, cert id, cert :,
-    our cert no?, c of c no, c of c :, c o c no, c o c :, coc ref, report no, report ref, report :,
+    our cert no?, c of c no?, c o c no?, coc ref, report no, report ref, report :,
     test report no, inspection report no, ndt report no, lab report no, document no, doc no, release no,
     control no, zeugnis no, bescheinigung no, bescheinigungs no, prufbericht no, certificat no,
     no du certificat, no de certificat, no cert, certificado no, no de certificado, certificato no,
@@ -133,7 +133,7 @@ export const LABELS = {
   temperature: `temperature, temp, set temp, set temperature, set point, set pt, set, setpoint temp, soak temp,
     soak temperature, soaking temperature, soak set point, furnace temp, furnace temperature,
     furnace set, furnace set point, oven temp, oven temperature, hold temp, holding temperature,
-    process temp, process temperature, cycle temperature, temp f, temp c, deg f, deg c, f, c :,
+    process temp, process temperature, cycle temperature, temp f, temp c, deg f, deg c,
     temperatur, solltemperatur, temperatura, consigne`,
   minutes: `soak time, soak, soak duration, soak min, soak minutes, soak hrs, soak hours, soaking time,
     time at temp, time at temperature, time at heat, at temp, at temperature, min at temp,

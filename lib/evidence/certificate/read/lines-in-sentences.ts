@@ -47,7 +47,7 @@ function linesIn(passage: Passage, paper: Paper): ReadLine[] {
   const parts = [...passage.text.matchAll(PART)];
   return parts.flatMap((match, index) => {
     const at = match.index + match[0].length;
-    const before = parts.length === 1 ? 0 : index === 0 ? 0 : match.index;
+    const before = index === 0 ? 0 : match.index;
     const until = parts[index + 1]?.index ?? passage.text.length;
     const read = partIn(passageFrom(passage, at, until), beginsWithDay);
     if (!read) return [];

@@ -28,8 +28,9 @@ export interface ReadLine {
 
 type Writer = (line: ReadLine, value: AnswerValue, paper: Paper) => boolean;
 
-const cell = <Value>(reading: Reading<Value> | null, { how }: AnswerValue): ReadCell<Value> | null =>
-  reading && { ...reading, trust: TRUST[how] };
+function cell<Value>(reading: Reading<Value> | null, { how }: AnswerValue): ReadCell<Value> | null {
+  return reading && { ...reading, trust: TRUST[how] };
+}
 
 /** How each label's value is read into a line; false where it is not of the label's shape. */
 const WRITERS: Partial<Record<LabelKey, Writer>> = {

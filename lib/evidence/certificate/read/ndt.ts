@@ -105,9 +105,6 @@ function candidatesFor(paper: Paper, rule: FieldRule): Candidate<string>[] {
 
 function valueOf(match: RegExpExecArray): string {
   const value = (match.slice(1).find((group) => group !== undefined) ?? match[0]).trim();
-  return /^[ivl|]+$/i.test(value)
-    ? value.replace(/[l|]/g, 'I').toUpperCase()
-    : value.length === 1
-      ? value.toUpperCase()
-      : value;
+  if (/^[ivl|]+$/i.test(value)) return value.replace(/[l|]/g, 'I').toUpperCase();
+  return value.length === 1 ? value.toUpperCase() : value;
 }

@@ -73,11 +73,12 @@ export function quenchDelays(paper: Paper): Candidate<number>[] {
         /max|allow|limit|requir/i.test(match[0]) ||
         isLimit(paragraph.text, { start: at, end: at + seconds[0].length });
       const within = /^within/i.test(match[0]);
+      const stated = limit ? 0.2 : 0.8;
       // "Within 10 seconds" may be what is allowed; what is stated of the load stands elsewhere then.
       found.push({
         value: numberFrom(seconds[1] ?? '', paper.decimal),
         spot,
-        trust: limit && !within ? 0.2 : within ? 0.6 : 0.8,
+        trust: within ? 0.6 : stated,
       });
     }
     return found;

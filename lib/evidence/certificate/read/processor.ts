@@ -31,12 +31,9 @@ export function processors(paper: Paper): Candidate<string>[] {
     const [value] = answer.values;
     const name = value && nameIn(value.passage);
     if (!name || !value) return [];
-    const strict = /^(?:from|von|de|company|facility|manufacturer)/.test(answer.words)
-      ? looksLikeFirm(name.value)
-        ? 0.75
-        : 0.3
-      : 0.95;
-    return [{ ...name, trust: TRUST[value.how] * strict }];
+    const vague = /^(?:from|von|de|company|facility|manufacturer)/.test(answer.words);
+    const likely = looksLikeFirm(name.value) ? 0.75 : 0.3;
+    return [{ ...name, trust: TRUST[value.how] * (vague ? likely : 0.95) }];
   });
   const headed = paper.sheets.slice(0, 2).flatMap((sheet) =>
     letterhead(

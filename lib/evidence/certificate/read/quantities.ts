@@ -67,7 +67,7 @@ const MINUTES = String.raw`minutes?|mins?\.?|minuten|minutos?|m(?=\s*\d*\s*s\b)|
 const SECONDS = String.raw`seconds?|secs?\.?|s|sekunden|sek\.?|secondes?|segundos?`;
 const AMOUNT = String.raw`\d+(?:[.,]\d+)?|\d+\s+\d\/\d|[¼½¾]`;
 const DURATION = new RegExp(
-  String.raw`(?<![\d.,:]|\d\/)(?:(${AMOUNT})\s*-?\s*(?:${HOURS})(?![\p{L}\d])(?:\s*(?:and|,|&)?\s*(${AMOUNT})\s*-?\s*(?:${MINUTES})(?![\p{L}]))?|(${AMOUNT})\s*-?\s*(?:${MINUTES})(?![\p{L}\d])(?:\s*(\d{1,2})\s*(?:${SECONDS})(?![\p{L}\d]))?|(\d{1,3}):(\d\d)\s*(?:${HOURS})(?![\p{L}\d])|(\d+(?:[.,]\d+)?)\s*-?\s*(?:${SECONDS})(?![\p{L}\d])|(\d{1,2})h(\d{2})(?![\d]))`,
+  String.raw`(?<![\d.,:]|\d\/)(?:(${AMOUNT})\s*-?\s*(?:${HOURS})(?![\p{L}\d]|-\d)(?:\s*(?:and|,|&)?\s*(${AMOUNT})\s*-?\s*(?:${MINUTES})(?![\p{L}]))?|(${AMOUNT})\s*-?\s*(?:${MINUTES})(?![\p{L}\d])(?:\s*(\d{1,2})\s*(?:${SECONDS})(?![\p{L}\d]))?|(\d{1,3}):(\d\d)\s*(?:${HOURS})(?![\p{L}\d])|(\d+(?:[.,]\d+)?)\s*-?\s*(?:${SECONDS})(?![\p{L}\d])|(\d{1,2})h(\d{2})(?![\d]))`,
   'giu',
 );
 

@@ -2,7 +2,7 @@ import type { OpenedFile, Page } from '../../page';
 import type { CertificateLine, Cycle, Reading, StatedCertificate } from '../certificate';
 import { mostBelieved, type Candidate, type Chosen } from './candidates';
 import { certificateDates } from './certificate-date';
-import { alloys, classTypes, conditions } from './class-type';
+import { alloys, classTypes, conditions, designation } from './class-type';
 import { FactCollector } from './collect-facts';
 import { readCycles, type ReadCycle, type ReadValue } from './cycles';
 import { BATCH, CERTIFICATE_NUMBER, codesFor, PURCHASE_ORDER, sameCode } from './identity';
@@ -104,12 +104,11 @@ function believed<Value>(
 
 /** What stands behind the specification's number, wherever it is named with something behind it. */
 function restOf(paper: Paper, chosen: Chosen<SpecificationRead>): string {
-  return (
-    specifications(paper).find(
-      ({ value }) =>
-        sameSpecification(value, chosen.value) && /\b(?:type|class|method|grade|cl|ty)\b/i.test(value.rest),
-    )?.value.rest ?? chosen.value.rest
-  );
+  const said = ({ rest }: SpecificationRead): number => designation(rest)?.length ?? 0;
+  const same = specifications(paper).filter(({ value }) => sameSpecification(value, chosen.value));
+  // A label's value ends with its line, a sentence does not.
+  const [longest] = same.map(({ value }) => value).sort((a, b) => said(b) - said(a));
+  return longest && said(longest) > 0 ? longest.rest : chosen.value.rest;
 }
 
 /** The revision may be named only in one of the places that name the specification. */

@@ -46,7 +46,7 @@ const UNITS: Record<ReadingKind, readonly Unit[]> = {
   ],
   thickness: [
     {
-      pattern: /(?:µ|μ|u)[\s-]?in(?:ch(?:es)?)?\b|micro-?\s?inch(?:es)?|millionths/iu,
+      pattern: /(?:µ|μ|u|p)[\s-]?in(?:ch(?:es)?)?\b|micro-?\s?inch(?:es)?|millionths/iu,
       name: 'microinch',
       range: [2, 5000],
     },

@@ -32,6 +32,8 @@ export interface Sheet {
   readonly lines: readonly Line[];
   readonly marks: readonly Mark[];
   readonly tables: readonly Table<FoundLabel>[];
+  /** The step in whose part of the form each table stands. */
+  readonly sections: readonly (Step | null)[];
   readonly asked: readonly Asked[];
   /** Sentences over all their lines; a line that is none stands alone. */
   readonly paragraphs: readonly Passage[];
@@ -55,6 +57,10 @@ export function sheetOf(page: Page): Sheet {
     lines,
     marks: page.marks,
     tables,
+    sections: tables.map(({ from }) => {
+      const first = lines[from]?.segments[0];
+      return first ? sectionOf(lines, from, first) : null;
+    }),
     asked: askedOn(lines, tables, page.number),
     paragraphs: paragraphsOf(lines),
   };
@@ -105,16 +111,23 @@ function askedOn(lines: readonly Line[], tables: readonly Table<FoundLabel>[], p
   const labelled = lines.map(({ segments }) =>
     segments.map((segment): Labelled => {
       const labels = labelsIn(segment.text);
-      return { segment, labels, isLabel: labels.some(({ whole, marked }) => whole || marked) };
+      // One letter is a revision or a unit.
+      const isLabel = segment.text.length > 1 && labels.some(({ whole, marked }) => whole || marked);
+      return { segment, labels, isLabel };
     }),
   );
   const asked: Asked[] = [];
+  const prose = new Set(
+    paragraphLines(lines).flatMap((part) => part.slice(1).map((line) => lines.indexOf(line))),
+  );
   labelled.forEach((row, index) => {
     // The cells of a table's heading have their values in the table.
     const inTable = tables.some(({ from, to }) => index >= from && index < to);
     row.forEach(({ segment, labels }, place) => {
       labels.forEach((label, turn) => {
         if (inTable && (label.whole || !label.marked)) return;
+        // In the middle of a sentence the first word of a line is no label.
+        if (prose.has(index) && !label.marked && !(label.whole && row.length > 1)) return;
         const until = labels[turn + 1]?.start ?? segment.text.length;
         const spot = spotIn(segment, label.start, label.end);
         if (!spot) return;
@@ -151,6 +164,8 @@ function valuesOf(where: Place): AskedValue[] {
   }
   const [next] = right;
   if (next) values.push({ passage: next, how: 'right' });
+  // Dots of a leader may be read as letters: what comes behind them is tried too.
+  for (const further of right.slice(1)) values.push({ passage: further, how: 'line' });
   if (right.length > 1) values.push({ passage: joined(right), how: 'line' });
   if (below) {
     const value: AskedValue = { passage: below, how: 'below' };
@@ -207,6 +222,7 @@ function sectionOf(lines: readonly Line[], index: number, segment: Segment): Ste
     if (!line) continue;
     for (const other of line.segments) {
       if (other === segment || !isHeading(other, line, above === index ? segment : null)) continue;
+      if (answersLabel(other, line)) continue;
       const beside = above !== index && sharedAcross(other.box, segment.box) <= 0 && line.segments.length > 1;
       if (beside) continue;
       const steps = stepsIn(other.text);
@@ -216,6 +232,12 @@ function sectionOf(lines: readonly Line[], index: number, segment: Segment): Ste
     }
   }
   return null;
+}
+
+/** Words right of a label are its value: the name of a process says what the certificate is of, not where a part begins. */
+function answersLabel(other: Segment, { segments }: Line): boolean {
+  const before = segments[segments.indexOf(other) - 1];
+  return before !== undefined && labelAtStart(before.text)?.whole === true;
 }
 
 /** A few words without figures that are no label of a value beside them. Left of the label on its own line also counts. */
@@ -237,7 +259,10 @@ function isHeading(other: Segment, line: Line, onLineOf: Segment | null): boolea
 }
 
 /** Lines that run on in the next one. A line runs on when it is a sentence's and reaches as far right as its neighbours. */
-function paragraphsOf(lines: readonly Line[]): Passage[] {
+const paragraphsOf = (lines: readonly Line[]): Passage[] =>
+  paragraphLines(lines).map((part) => joined(part.flatMap(({ segments }) => segments)));
+
+function paragraphLines(lines: readonly Line[]): Line[][] {
   const paragraphs: Line[][] = [];
   for (const line of lines) {
     const open = paragraphs[paragraphs.length - 1];
@@ -245,7 +270,7 @@ function paragraphsOf(lines: readonly Line[]): Passage[] {
     if (open && last && runsOn(last, line)) open.push(line);
     else paragraphs.push([line]);
   }
-  return paragraphs.map((part) => joined(part.flatMap(({ segments }) => segments)));
+  return paragraphs;
 }
 
 function runsOn(last: Line, line: Line): boolean {
@@ -257,5 +282,13 @@ function runsOn(last: Line, line: Line): boolean {
   const [first] = line.segments;
   const label = first ? labelAtStart(first.text) : null;
   const listed = /^\s*(?:[-–•*·]|\d{1,2}[.)])\s/.test(first?.text ?? '');
-  return close && level && wide && prose && !listed && !(label?.marked ?? false);
+  return (
+    close &&
+    level &&
+    wide &&
+    prose &&
+    !listed &&
+    !(label?.marked ?? false) &&
+    !(label?.whole && line.segments.length > 1)
+  );
 }

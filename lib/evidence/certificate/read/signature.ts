@@ -40,6 +40,10 @@ export function readSignature(paper: Paper): ReadSignature {
         belief: places.length > 0 ? 0.93 : 0.8,
       };
   }
+  for (const place of nearby) {
+    const scrawl = scrawlAt(paper, place);
+    if (scrawl) return { present: true, spot: scrawl, belief: 0.8 };
+  }
   const loose = places.length === 0 ? looseStroke(paper) : null;
   if (loose) return { present: true, spot: loose, belief: 0.7 };
   const [place] = places;
@@ -60,16 +64,35 @@ function wordsOfSignature(passage: Passage): Spot[] {
 function markAt(paper: Paper, { label, page }: Answer): { sheet: Sheet; mark: Mark } | null {
   const sheet = paper.sheets.find((one) => one.page === page);
   if (!sheet || !label) return null;
-  const [left, top, right, bottom] = label.box;
-  const height = Math.max(8, heightOf(label.box));
-  // Above the label's line, on it, or beside it.
-  const room: Box = [left - 3 * height, top - 6.5 * height, right + 26 * height, bottom + 3.5 * height];
+  const room = roomFor(label.box);
   const mark = sheet.marks.find(({ kind, box }) => {
     const inside =
       sharedAcross(box, room) > 0.4 * widthOf(box) && sharedDown(box, room) > 0.4 * heightOf(box);
     return inside && (kind === 'stroke' || (kind === 'picture' && isSmall(box, sheet)));
   });
   return mark ? { sheet, mark } : null;
+}
+
+/** Above the label's line, on it, or beside it. */
+function roomFor([left, top, right, bottom]: Box): Box {
+  const height = Math.max(8, bottom - top);
+  return [left - 3 * height, top - 6.5 * height, right + 26 * height, bottom + 3.5 * height];
+}
+
+/** Recognition makes letters of a hand's strokes, and does not believe them itself. */
+function scrawlAt(paper: Paper, { label, page }: Answer): Spot | null {
+  const sheet = paper.sheets.find((one) => one.page === page);
+  if (!sheet || !label || sheet.origin !== 'recognised') return null;
+  const room = roomFor(label.box);
+  for (const { segments } of sheet.lines)
+    for (const segment of segments) {
+      const inside =
+        sharedAcross(segment.box, room) > 0.6 * widthOf(segment.box) &&
+        sharedDown(segment.box, room) > 0.4 * heightOf(segment.box);
+      const unsure = segment.words.every(({ confidence }) => confidence < 0.5);
+      if (inside && unsure && widthOf(segment.box) > 25) return spotIn(segment, 0, segment.text.length);
+    }
+  return null;
 }
 
 /** A picture of a signature or a stamp, not of the page. */

@@ -87,12 +87,9 @@ function inText(passage: Passage): Candidate<SpecificationRead>[] {
     const read = readOf(one);
     const aside = ORDERS_NOTHING.test(one.number);
     const done = DONE_TO.test(text.slice(0, one.at));
-    return candidate(
-      read,
-      one,
-      passage,
-      aside ? 0.02 : read.process ? (done ? 0.72 : 0.6) : done ? 0.4 : 0.2,
-    );
+    const [whenDone, otherwise] = read.process ? [0.72, 0.6] : [0.4, 0.2];
+    const trust = done ? whenDone : otherwise;
+    return candidate(read, one, passage, aside ? 0.02 : trust);
   });
 }
 
@@ -104,9 +101,8 @@ function candidate(
 ): Candidate<SpecificationRead>[] {
   const spot = spotIn(passage, at, at + length);
   if (!spot) return [];
-  return [
-    { value, spot, trust: ORDERS_NOTHING.test(number) ? trust * 0.1 : value.process ? trust : trust * 0.85 },
-  ];
+  const likely = value.process ? trust : trust * 0.85;
+  return [{ value, spot, trust: ORDERS_NOTHING.test(number) ? trust * 0.1 : likely }];
 }
 
 function readOf({ number, revision, rest }: FoundSpecification): SpecificationRead {

@@ -25,11 +25,11 @@ const SAID: readonly (readonly [Step, string])[] = [
   ],
   [
     'natural_age',
-    String.raw`natural(?:ly)?[- ]ag(?:e|ed|e?ing)|ag(?:ed|ing) naturally|(?:room[- ]temp(?:erature|\.)?|r\.?t\.?)[- ]ag(?:e|ed|e?ing)|ag(?:e|ed|e?ing) at (?:room temp(?:erature|\.)?|r\.?t\.?|ambient)|natural|kaltausla[a-zäöü]*|kaltausl\w*|maturation|vieillissement naturel|envejecimiento natural`,
+    String.raw`nat(?:ural(?:ly)?|\.)?[- ]+ag(?:e|ed|e?ing)|ag(?:ed|ing) naturally|(?:room[- ]temp(?:erature|\.)?|r\.?t\.?)[- ]ag(?:e|ed|e?ing)|ag(?:e|ed|e?ing) at (?:room temp(?:erature|\.)?|r\.?t\.?|ambient)|natural|kaltausla[a-zäöü]*|kaltausl\w*|maturation|vieillissement naturel|envejecimiento natural`,
   ],
   [
     'artificial_age',
-    String.raw`artificial(?:ly)?[- ]ag(?:e|ed|e?ing)|precipitation(?: heat[- ]?treat(?:ed|ment|ing)?|[- ]harden(?:ed|ing)?| treatment| ag(?:e|ed|e?ing))?|age[- ]?harden(?:ed|ing)?|ag(?:e|ed|e?ing)|warmausl\w*|vieillissement artificiel|vieillissement|envejecimiento`,
+    String.raw`art(?:ificial(?:ly)?|\.)[- ]*ag(?:e|ed|e?ing)|precipitation(?: heat[- ]?treat(?:ed|ment|ing)?|[- ]harden(?:ed|ing)?| treatment| ag(?:e|ed|e?ing))?|age[- ]?harden(?:ed|ing)?|ag(?:e|ed|e?ing)|warmausl\w*|vieillissement artificiel|vieillissement|envejecimiento`,
   ],
   [
     'solution',
