@@ -44,6 +44,7 @@ export function paintMarks(plot: uPlot, drawing: ChartDrawing, palette: Palette,
     ctx.font = `600 ${13 * size}px ${palette.cond}`;
     ctx.fillStyle = palette['proved-ink'];
     const upper = plot.valToPos(band.upper, 'y', true);
+    ctx.textAlign = 'left';
     ctx.fillText(`band ${band.lower} to ${band.upper} °${unit}`, bbox.left + 8 * size, upper - 6 * size);
     if (soak) soakWords(plot, soak, palette);
     numbers(plot, events, palette);

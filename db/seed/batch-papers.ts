@@ -94,7 +94,11 @@ export async function certificateOf(
       ],
     })),
     statements: [
-      ...new Set(batch.requirements.flatMap((one) => statedOn(one, given.stated) ?? [])),
+      ...new Set(
+        batch.requirements.flatMap(
+          (one) => statedOn(one, { otherwise: given.stated, day: dayOf(ctx.now) })?.split('\n') ?? [],
+        ),
+      ),
       'We certify that the parts listed above were processed and inspected to the order and the specification named, and that the results are on file.',
     ],
     signed: { name: given.processor.contact, role: 'Quality', day: dayOf(ctx.now) },

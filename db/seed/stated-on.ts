@@ -7,13 +7,15 @@ const ANSWERED_BY_THE_PAPER = /^(order|signature)/i;
  * What a processor prints about one requirement: a figure inside its limit, or that it was done.
  *
  * @param otherwise figures of a paper that is not as it ought to be, by characteristic.
+ * @param day of the work, `YYYY-MM-DD`.
  */
 export function statedOn(
   { characteristic, limit, unit }: { characteristic: string; limit: string; unit: string },
-  otherwise: Readonly<Record<string, string>>,
+  { otherwise, day }: { otherwise: Readonly<Record<string, string>>; day: string },
 ): string | null {
   if (ANSWERED_BY_THE_PAPER.test(characteristic)) return null;
   const given = otherwise[characteristic];
+  if (/^bake start/i.test(characteristic)) return bakeTimes(day, Number(given ?? USUAL_HOURS_TO_BAKE));
   if (given !== undefined) return `${characteristic}: ${given}`;
   const figures = limit
     .split(', ')
@@ -39,4 +41,14 @@ function insideOf({ min, max }: Limit): number {
 function digitsOf(value: number): number {
   if (Number.isInteger(value)) return 0;
   return Math.abs(value) < 1 ? 4 : 1;
+}
+
+const PLATED_AT = 7;
+const USUAL_HOURS_TO_BAKE = 2.5;
+
+/** Both moments, so that whoever reads it can reckon the hours between. */
+function bakeTimes(day: string, hours: number): string {
+  const clock = (at: number) =>
+    `${String(Math.floor(at)).padStart(2, '0')}:${String(Math.round((at % 1) * 60)).padStart(2, '0')}`;
+  return `Plating completed: ${day} ${clock(PLATED_AT)}\nBake start: ${day} ${clock(PLATED_AT + hours)}`;
 }

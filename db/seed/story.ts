@@ -57,7 +57,7 @@ const PRESENT: readonly Campaign[] = [
         shippedAfter: 8,
         receivedAfter: 9,
         papersAfter: 9,
-        states: { 'Bake start': '6.2 h after plating' },
+        states: { 'Bake start': '6.2' },
         held: { after: 10, pieces: 16, what: 'Bake began 6 h 10 min after plating; the order says 4 h' },
       }),
     ],
