@@ -95,7 +95,8 @@ function rowLabelled({ table, row, name, order, section }: RowPlace): Answer[] |
   const results = headings.flatMap((heading, index) => (heading && FOUND.has(heading.key) ? [index] : []));
   const steps = headings.flatMap((heading, index) => (index > 0 && heading?.step ? [index] : []));
   const places = headings.flatMap((heading, index) => (heading?.key === 'specimen' ? [index] : []));
-  const asks = results.length > 0 ? results : ([steps, places].find(({ length }) => length > 1) ?? []);
+  const apart = steps.length > 1 ? steps : places;
+  const asks = results.length > 0 ? results : apart;
   const first = row.cells.findIndex(
     (cell, index) => cell !== null && !/^\d{1,2}\.?$/.test(cell.text) && !asks.includes(index),
   );
@@ -164,6 +165,12 @@ function byColumn({ table, row, name, order, section }: RowPlace): Answer[] {
 const namesStep = (cell: Passage, heading: FoundLabel | null): boolean =>
   (heading === null || ['process', 'test', 'condition', 'description'].includes(heading.key)) &&
   stepsIn(cell.text).length > 0;
+
+/** What runs on along the line first: a series of readings, or a number and its revision, may stand wide apart. */
+export const widestFirst = ({ values }: Answer): AnswerValue[] => {
+  const wide = ({ how, passage }: AnswerValue): number => (how === 'line' ? passage.text.length : 0);
+  return [...values].sort((a, b) => wide(b) - wide(a));
+};
 
 /** The first of an answer's values that is of the shape asked for, with how far its place is to be believed. */
 export function fitting<Value>(

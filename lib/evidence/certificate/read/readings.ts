@@ -1,7 +1,7 @@
 import { findSpecifications } from '../../../trade/lineage/recognise-specification';
 import { boxAround } from '../../layout/box';
 import { passageFrom, spotIn, type Passage, type Spot } from '../../layout/passage';
-import { TRUST } from './answers';
+import { TRUST, widestFirst } from './answers';
 import { daysIn } from './dates';
 import type { LabelKey } from './labels';
 import type { Paper } from './paper';
@@ -52,7 +52,8 @@ const UNITS: Record<ReadingKind, readonly Unit[]> = {
     },
     { pattern: /(?<![\p{L}])mils?(?![\p{L}-])/iu, name: 'mil', range: [0.005, 10] },
     {
-      pattern: /(?:µ|μ)m|(?<![\p{L}])(?:um|microns?|micrometers?|micrometres?|mikrometer)(?![\p{L}])/iu,
+      pattern:
+        /(?:µ|μ)m|(?<=\d\s?)[ypj]m(?![\p{L}])|(?<![\p{L}])(?:um|microns?|micrometers?|micrometres?|mikrometer)(?![\p{L}])/iu,
       name: 'µm',
       range: [0.05, 250],
     },
@@ -99,7 +100,7 @@ export function readReadings(paper: Paper): ReadReading[] {
   for (const answer of paper.answers) {
     if (!isKind(answer.key) || answer.also.includes('requirement')) continue;
     const kind = answer.key;
-    const values = [...answer.values].sort((a, b) => Number(b.how === 'line') - Number(a.how === 'line'));
+    const values = widestFirst(answer);
     for (const { passage, how } of values) {
       const found = valuesIn(passage, kind, `${answer.qualifier} ${answer.words}`, paper.decimal);
       if (!found) continue;

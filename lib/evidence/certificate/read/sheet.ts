@@ -1,9 +1,10 @@
 import { heightOf, sharedAcross } from '../../layout/box';
 import { linesOf, type Line, type Segment } from '../../layout/lines';
 import { joined, passageFrom, spotIn, type Passage, type Spot } from '../../layout/passage';
-import { tablesOf, type Table } from '../../layout/tables';
+import type { Table } from '../../layout/tables';
 import type { Mark, Page } from '../../page';
 import { labelAtStart, labelsIn, type FoundLabel } from './find-labels';
+import { labelledTables } from './labelled-tables';
 import { stepsIn, type Step } from './steps';
 
 /** A label and what may be its value, the likeliest first. */
@@ -41,14 +42,7 @@ export interface Sheet {
 
 export function sheetOf(page: Page): Sheet {
   const lines = linesOf(page);
-  const tables = tablesOf<FoundLabel>(lines, {
-    read: headingOf,
-    endsTable: ({ text }) => {
-      const label = labelAtStart(text);
-      return label !== null && label.marked && /:/.test(text.slice(0, label.end));
-    },
-    anchors: ({ key }) => key === 'part_number',
-  });
+  const tables = labelledTables(lines);
   return {
     page: page.number,
     width: page.width,
@@ -63,40 +57,6 @@ export function sheetOf(page: Page): Sheet {
     }),
     asked: askedOn(lines, tables, page.number),
     paragraphs: paragraphsOf(lines),
-  };
-}
-
-/** What a cell of a table's heading asks for: a label, or a step whose figures stand under it. */
-function headingOf(text: string): FoundLabel | null {
-  const label = labelAtStart(text);
-  const [step] = stepsIn(text);
-  const names = step?.start === 0 && step.end >= text.trimEnd().length ? step.step : null;
-  if (label?.whole) return names && !label.step ? { ...label, step: names } : label;
-  if (PLACE_OF_TEST.test(text)) return plainHeading('specimen', text);
-  // "Cast/lot": one of the two is known.
-  const half = text.includes('/') ? text.split('/').map((part) => labelAtStart(part.trim())) : [];
-  const known = half.find((one) => one?.whole);
-  if (known) return { ...known, words: text.toLowerCase() };
-  if (!names) return null;
-  return { ...plainHeading('process', text), step: names };
-}
-
-/** Columns for the places or pieces of a test: "No. 2", "Specimen 3", "4". */
-const PLACE_OF_TEST =
-  /^(?:(?:no|nr|specimen|sample|piece|pc|test|reading|probe|point|place|location|pos)\.?\s*)?#?\s*\d{1,2}$/i;
-
-function plainHeading(key: FoundLabel['key'], text: string): FoundLabel {
-  const words = text.toLowerCase();
-  return {
-    key,
-    words,
-    also: [],
-    step: null,
-    start: 0,
-    end: text.length,
-    marked: false,
-    qualifier: '',
-    whole: true,
   };
 }
 

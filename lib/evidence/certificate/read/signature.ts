@@ -79,6 +79,9 @@ function roomFor([left, top, right, bottom]: Box): Box {
   return [left - 3 * height, top - 6.5 * height, right + 26 * height, bottom + 3.5 * height];
 }
 
+/** Letters without a word in them: strokes up and down. */
+const NO_WORD = /^[^\p{Ll}\d]{1,5}$/u;
+
 /** Recognition makes letters of a hand's strokes, and does not believe them itself. */
 function scrawlAt(paper: Paper, { label, page }: Answer): Spot | null {
   const sheet = paper.sheets.find((one) => one.page === page);
@@ -89,7 +92,9 @@ function scrawlAt(paper: Paper, { label, page }: Answer): Spot | null {
       const inside =
         sharedAcross(segment.box, room) > 0.6 * widthOf(segment.box) &&
         sharedDown(segment.box, room) > 0.4 * heightOf(segment.box);
-      const unsure = segment.words.every(({ confidence }) => confidence < 0.5);
+      const unsure = segment.words.every(
+        ({ text, confidence }) => confidence < (NO_WORD.test(text) ? 0.8 : 0.5),
+      );
       if (inside && unsure && widthOf(segment.box) > 25) return spotIn(segment, 0, segment.text.length);
     }
   return null;

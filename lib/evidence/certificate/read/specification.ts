@@ -1,7 +1,7 @@
 import type { Process } from '../../../trade/process';
 import { findSpecifications, type FoundSpecification } from '../../../trade/lineage/recognise-specification';
 import { spotIn, type Passage } from '../../layout/passage';
-import { TRUST, type Answer } from './answers';
+import { TRUST, widestFirst, type Answer } from './answers';
 import type { Candidate } from './candidates';
 import { revisionIn } from './codes';
 import type { Paper } from './paper';
@@ -51,10 +51,6 @@ function fromAnswer(paper: Paper, answer: Answer): Candidate<SpecificationRead>[
   }
   return [];
 }
-
-/** The revision may stand a wide space further along the line; what stands under the label is as good as a whole. */
-const widestFirst = (answer: Answer): Answer['values'] =>
-  [...answer.values].sort((a, b) => Number(b.how === 'line') - Number(a.how === 'line'));
 
 /** A label or column "Rev" that goes with this specification and not with a part. */
 function revisionBeside(paper: Paper, answer: Answer): string | null {

@@ -1,0 +1,88 @@
+import type { Line } from '../../layout/lines';
+import { tablesOf, type Table } from '../../layout/tables';
+import { labelAtStart, type FoundLabel } from './find-labels';
+import { stepsIn } from './steps';
+
+/** The tables of a page whose headings are labels. */
+export function labelledTables(lines: readonly Line[]): Table<FoundLabel>[] {
+  return tablesOf<FoundLabel>(lines, {
+    read: headingOf,
+    // "Process: Stress relief": the second is the first's value.
+    holds: ([first, second, ...more]) =>
+      more.length > 0 || first?.key !== 'process' || second?.key !== 'process',
+    endsTable: ({ text }) => {
+      const label = labelAtStart(text);
+      return label !== null && label.marked && /:/.test(text.slice(0, label.end));
+    },
+    anchors: ({ key }) => key === 'part_number',
+  }).map(withPartColumn);
+}
+
+/** What a cell of a table's heading asks for: a label, or a step whose figures stand under it. */
+function headingOf(text: string): FoundLabel | null {
+  const label = labelAtStart(text);
+  const [step] = stepsIn(text);
+  const names = step?.start === 0 && step.end >= text.trimEnd().length ? step.step : null;
+  if (label?.whole) return names && !label.step ? { ...label, step: names } : label;
+  if (PLACE_OF_TEST.test(text)) return plainHeading('specimen', text);
+  // "Cast/lot": one of the two is known.
+  const half = text.includes('/') ? text.split('/').map((part) => labelAtStart(part.trim())) : [];
+  const known = half.find((one) => one?.whole);
+  if (known) return { ...known, words: text.toLowerCase() };
+  if (!names) return null;
+  return { ...plainHeading('process', text), step: names };
+}
+
+/** Columns for the places or pieces of a test: "No. 2", "Specimen 3", "#4". */
+const PLACE_OF_TEST =
+  /^(?:(?:no|nr|specimen|sample|piece|pc|test|reading|probe|point|place|location|pos)\.?\s*#?|#)\s*\d{1,2}$/i;
+
+function plainHeading(key: FoundLabel['key'], text: string): FoundLabel {
+  const words = text.toLowerCase();
+  return {
+    key,
+    words,
+    also: [],
+    step: null,
+    start: 0,
+    end: text.length,
+    marked: false,
+    qualifier: '',
+    whole: true,
+  };
+}
+
+/** What stands beside part numbers. */
+const BESIDE_PARTS: ReadonlySet<FoundLabel['key']> = new Set([
+  'revision',
+  'lot',
+  'material',
+  'description',
+  'quantity',
+  'quantity_accepted',
+  'quantity_rejected',
+]);
+
+/**
+ * Lines without a heading for their part numbers have them under the one heading that says nothing to us, or was recognised
+ * as something else: "PIN" for "P/N".
+ */
+function withPartColumn(table: Table<FoundLabel>): Table<FoundLabel> {
+  const keys = table.columns.map(({ heading }) => heading?.key ?? null);
+  const beside = new Set(keys.filter((key) => key !== null && BESIDE_PARTS.has(key)));
+  if (keys.includes('part_number') || beside.size < 3) return table;
+  const isCode = (text: string): boolean =>
+    /^(?=.*\d)[A-Z0-9][A-Z0-9./-]{3,}(?:\s+rev\.?\s*[A-Z])?$/i.test(text.trim());
+  const found = keys.flatMap((key, column) => {
+    const cells = table.rows.flatMap(({ cells: row }) => row[column]?.text ?? []);
+    return key === null && cells.length > 0 && cells.every(isCode) ? [column] : [];
+  });
+  const [only] = found;
+  if (found.length !== 1) return table;
+  return {
+    ...table,
+    columns: table.columns.map((column, index) =>
+      index === only ? { ...column, heading: plainHeading('part_number', column.text) } : column,
+    ),
+  };
+}
