@@ -8,7 +8,12 @@ test.each([
   ['Solution temperature', '488 to 498', '°C', { solution: { set_f: 919.4, tolerance_f: 9 } }],
   ['Quench delay', '10 or less', 's', { quench: { max_delay_seconds: 10 } }],
   ['Quench water temperature', '90 °F or less', '', { quench: { max_medium_temp_f: 90 } }],
-  ['Age', '345 to 355 °F, 8 h', '', { age: { kind: 'artificial', set_f: 350, tolerance_f: 5, min_hours: 8 } }],
+  [
+    'Age',
+    '345 to 355 °F, 8 h',
+    '',
+    { age: { kind: 'artificial', set_f: 350, tolerance_f: 5, min_hours: 8 } },
+  ],
   ['Natural age', '96 or more', 'h', { age: { kind: 'natural', min_hours: 96 } }],
   ['Hardness', 'HRB 63 or more', '', { hardness: { scale: 'HRB', min: 63 } }],
   ['Conductivity', '28.5 to 32.5', '% IACS', { conductivity_pct_iacs: { min: 28.5, max: 32.5 } }],
