@@ -35,8 +35,6 @@ export function useReading(certificateId: string) {
   const piecesOf = (lineNo: number) => data?.lines.find((line) => line.lineNo === lineNo);
   return { data, proposalOf, piecesOf, chosen, choose: setChosen };
 }
-export type Reading = ReturnType<typeof useReading>;
-
 export const qualityOfProposal = ({ confidence }: Pick<Proposal, 'confidence'>): ReadQuality | null =>
   confidence === null ? null : qualityOf(confidence);
 

@@ -70,7 +70,7 @@ function Chart({ data }: { data: ChartDetail }) {
           {error && <Failing says="The file could not be fetched." again={error.message} />}
           {requirement === null && (
             <p className="py-3">
-              The batch asks for no temperature. Say what the chart is to be held against.
+              The batch asks for no temperature, or for several. Say what the chart is to be held against.
             </p>
           )}
           {drawn && 'fault' in drawn && (

@@ -13,24 +13,34 @@ interface Step {
 }
 
 /**
- * What a chart of a batch must show, from what the batch asks for.
+ * What a chart of a batch must show, from all that the batch and its lines ask for: the longest of the least times, the
+ * shortest of the most.
  *
- * @returns in °F; null where no temperature is asked for that a chart could be held against.
+ * @returns in °F; null where no temperature is asked for that a chart could be held against, or lines ask for different ones.
  */
-export function askedOfChart(asked: Requirements): ChartRequirement | null {
+export function askedOfChart(asked: readonly Requirements[]): ChartRequirement | null {
   for (const name of STEPS) {
-    const step = asked[name] as Step | undefined;
-    if (step?.set_f === undefined || !step.tolerance_f) continue;
-    const least = step.soak_min_minutes ?? (step.min_hours === undefined ? undefined : step.min_hours * 60);
-    const delay = name === 'solution' ? asked.quench?.max_delay_seconds : undefined;
+    const steps = asked.flatMap((one) => (one[name] as Step | undefined) ?? []);
+    const settings = steps.filter(({ set_f, tolerance_f }) => set_f !== undefined && tolerance_f);
+    const [setting] = settings;
+    if (setting?.set_f === undefined || setting.tolerance_f === undefined) continue;
+    const { set_f: set, tolerance_f: tolerance } = setting;
+    if (settings.some((one) => one.set_f !== set || one.tolerance_f !== tolerance)) return null;
+    const least = steps.flatMap(
+      ({ soak_min_minutes: minutes, min_hours: hours }) => minutes ?? inMinutes(hours),
+    );
+    const most = steps.flatMap(({ soak_max_minutes }) => soak_max_minutes ?? []);
+    const delays = name === 'solution' ? asked.flatMap(({ quench }) => quench?.max_delay_seconds ?? []) : [];
     return {
-      set: step.set_f,
-      tolerance: step.tolerance_f,
+      set,
+      tolerance,
       unit: 'F',
-      ...(least !== undefined && { soakMinutes: least }),
-      ...(step.soak_max_minutes !== undefined && { soakMinutesMax: step.soak_max_minutes }),
-      ...(delay !== undefined && { maxQuenchDelayS: delay }),
+      ...(least.length > 0 && { soakMinutes: Math.max(...least) }),
+      ...(most.length > 0 && { soakMinutesMax: Math.min(...most) }),
+      ...(delays.length > 0 && { maxQuenchDelayS: Math.min(...delays) }),
     };
   }
   return null;
 }
+
+const inMinutes = (hours: number | undefined): number[] => (hours === undefined ? [] : [hours * 60]);

@@ -9,7 +9,7 @@ import { readings } from '@/db/schema/readings';
 import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
 import { notFound } from '@/lib/errors';
-import { askedTogether, readBatchOrder } from '@/lib/readings/orders-of-batch';
+import { figuresOf, readBatchOrder } from '@/lib/readings/orders-of-batch';
 
 import { askedOfChart } from './asked-of-chart';
 import type { ChartDetail } from './contract';
@@ -44,7 +44,7 @@ export async function getChart(
     batch: { id: batch.id, number: batch.number, stage: batch.stage, processor },
     state: reading?.state ?? null,
     fault: reading?.fault ?? null,
-    asked: order && askedOfChart(askedTogether(order.requirements)),
+    asked: order && askedOfChart(figuresOf(order)),
     kept: kept.success ? kept.data : null,
     others,
   };

@@ -10,19 +10,16 @@ export interface AskedInWords {
   unit: string;
 }
 
-/** What one requirement asks for in figures, and how the comparison calls what answers it. */
+/** What one requirement asks for in figures, and where a certificate answers it. */
 export interface AskedInFigures {
   asked: Requirements;
-  /** The words that the comparison's requirement begins with. */
-  answeredBy: RegExp;
   /** Fields of a reading that speak of it, its cycles and readings named by their step and kind: `cycles[solution].minutes`. */
   fields: RegExp;
 }
 
 interface Form {
   characteristic: RegExp;
-  answeredBy: RegExp;
-  fields: RegExp;
+  fields: RegExp | ((asked: Requirements) => RegExp);
   /** Null where the words hold no figure that can be compared. */
   asked(limits: readonly Limit[], words: AskedInWords): Requirements | null;
 }
@@ -47,10 +44,8 @@ const isTemperature = ({ unit }: Limit) => /[°º]|^[FC]$/i.test(unit);
 function stepOf(limits: readonly Limit[]) {
   const setting = settingOf(limits.find(isTemperature));
   const time = limits.find((limit) => !isTemperature(limit) && /^(h|min)/i.test(limit.unit));
-  const minutes = (value: number | null) => {
-    if (value === null || !time) return undefined;
-    return isHours(time) ? value * 60 : value;
-  };
+  const inMinutes = time && isHours(time) ? 60 : 1;
+  const minutes = (value: number | null) => (value === null ? undefined : value * inMinutes);
   const [least, most] = [minutes(time?.min ?? null), minutes(time?.max ?? null)];
   if (!setting && least === undefined && most === undefined) return null;
   return {
@@ -60,10 +55,17 @@ function stepOf(limits: readonly Limit[]) {
   };
 }
 
+type AskedStep = NonNullable<ReturnType<typeof stepOf>>;
+
+/** Temperature and time of a step may be two requirements, each with its own answer on the certificate. */
+function partOf({ set_f, soak_min_minutes, soak_max_minutes }: AskedStep): string {
+  if (soak_min_minutes === undefined && soak_max_minutes === undefined) return 'set_temp';
+  return set_f === undefined ? '(minutes|soak_\\w+)' : '\\w+';
+}
+
 const furnaceStep = (key: string, characteristic: RegExp): Form => ({
   characteristic,
-  answeredBy: new RegExp(`^${key.replaceAll('_', ' ')} `),
-  fields: new RegExp(`^cycles\\[${key}\\]`),
+  fields: (asked) => new RegExp(`^cycles\\[${key}\\]\\.${partOf(asked[key] as AskedStep)}$`),
   asked: (limits) => {
     const step = stepOf(limits);
     return step && { [key]: step };
@@ -74,13 +76,11 @@ const FORMS: readonly Form[] = [
   furnaceStep('solution', /^solution|^soak/i),
   {
     characteristic: /^quench.*delay/i,
-    answeredBy: /^quench delay/,
     fields: /^quench_delay_s$/,
     asked: ([limit]) => (limit?.max == null ? null : { quench: { max_delay_seconds: limit.max } }),
   },
   {
     characteristic: /^quench/i,
-    answeredBy: /^quench (medium|in) /,
     fields: /^quench_medium/,
     asked: ([limit]) =>
       limit?.max == null
@@ -91,7 +91,6 @@ const FORMS: readonly Form[] = [
   },
   {
     characteristic: /^(natural )?age|^ageing|^artificial/i,
-    answeredBy: /ageing/,
     fields: /^cycles\[\w*age\]/,
     asked: (limits, { characteristic }) => {
       const setting = settingOf(limits.find(isTemperature));
@@ -113,32 +112,27 @@ const FORMS: readonly Form[] = [
   furnaceStep('stress_relief', /^stress relief/i),
   {
     characteristic: /hardness/i,
-    answeredBy: /^hardness/,
     fields: /^readings\[hardness\]/,
     asked: ([limit]) => (limit?.scale == null ? null : { hardness: { scale: limit.scale, ...ends(limit) } }),
   },
   {
     characteristic: /conductivity/i,
-    answeredBy: /^conductivity/,
     fields: /^readings\[conductivity\]/,
     asked: ([limit]) => (limit && /iacs/i.test(limit.unit) ? { conductivity_pct_iacs: ends(limit) } : null),
   },
   {
     characteristic: /thickness/i,
-    answeredBy: /thickness/,
     fields: /^readings\[thickness\]/,
     asked: ([limit]) =>
       limit && limit.unit !== '' ? { thickness: { unit: limit.unit, ...ends(limit) } } : null,
   },
   {
     characteristic: /bake.*(start|begin|within|delay)|(start|begin).*bake/i,
-    answeredBy: /^bake started/,
     fields: /^(plating_end|bake_start)$/,
     asked: ([limit]) => (limit?.max == null ? null : { bake: { max_hours_after_plating: limit.max } }),
   },
   {
     characteristic: /bake|embrittlement/i,
-    answeredBy: /^(bake|embrittlement)(?! started)/,
     fields: /^(bake_(start|end)|cycles\[(embrittlement_relief|bake)\])/,
     asked: (limits) => {
       const setting = settingOf(limits.find(isTemperature));
@@ -161,5 +155,5 @@ export function askedInFigures(words: AskedInWords): AskedInFigures | null {
   if (!form) return null;
   const limits = words.limit.split(/[,;]\s+/).flatMap((part) => readLimit(part, words.unit) ?? []);
   const asked = form.asked(limits, words);
-  return asked && { asked, answeredBy: form.answeredBy, fields: form.fields };
+  return asked && { asked, fields: typeof form.fields === 'function' ? form.fields(asked) : form.fields };
 }

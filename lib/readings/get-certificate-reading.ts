@@ -1,4 +1,4 @@
-import { and, asc, eq, ne, or } from 'drizzle-orm';
+import { and, asc, eq, isNull, ne, or, sql } from 'drizzle-orm';
 import type { z } from 'zod';
 
 import { batches } from '@/db/schema/batches';
@@ -9,12 +9,12 @@ import { readingCorrections, readings } from '@/db/schema/readings';
 import { authorize } from '@/lib/auth/authorize';
 import { shopOf, type Ctx } from '@/lib/auth/context';
 import { calendarDay } from '@/lib/day-words';
-import type { SeenCertificate, StatedCertificate } from '@/lib/evidence/certificate/certificate';
-import { matchOrder } from '@/lib/evidence/certificate/match/match-order';
+import type { SeenCertificate } from '@/lib/evidence/certificate/certificate';
 
 import type { CertificateReading } from './contract';
 import { findReading } from './find-reading';
 import { KeptCertificates, type KeptPage } from './kept-reading';
+import { ofBatchFirst } from './of-batch-first';
 import { readBatchOrder } from './orders-of-batch';
 import { propose } from './propose';
 import { withCorrections } from './with-corrections';
@@ -65,7 +65,8 @@ export async function getCertificateReading(
     ...base,
     certificateNumber: stated.certificate_number,
     certificateDate: stated.certificate_date,
-    facts: stated.facts,
+    // As the machine read them; what a person put in their place stands among the corrections.
+    facts: own.facts,
     ...proposed,
   };
 }
@@ -83,17 +84,6 @@ const correctionsOf = (ctx: Ctx, readingId: string) =>
     .where(eq(readingCorrections.readingId, readingId))
     .orderBy(asc(readingCorrections.id));
 
-/** A file may hold certificates for several batches: the one that speaks of this batch comes first. */
-function ofBatchFirst(
-  read: readonly StatedCertificate[],
-  order: Parameters<typeof matchOrder>[1][number] | null,
-): StatedCertificate[] {
-  if (order === null) return [...read];
-  const scores = read.map((stated) => matchOrder(stated, [order]).candidates[0]?.score ?? 0);
-  const best = scores.indexOf(Math.max(...scores));
-  return [...read.slice(best, best + 1), ...read.slice(0, best), ...read.slice(best + 1)];
-}
-
 /** Papers with the same number or the same bytes, and the other papers of this batch with their pieces. */
 async function seenBefore(
   ctx: Ctx,
@@ -104,6 +94,7 @@ async function seenBefore(
   const rows = await ctx.tx
     .select({
       number: certificates.number,
+      setAsideAt: certificates.setAsideAt,
       sha256: files.sha256,
       order: batches.orderNumber,
       processor: processors.name,
@@ -119,7 +110,7 @@ async function seenBefore(
         ne(certificates.id, id),
         or(
           eq(certificates.batchId, batchId),
-          number === null ? undefined : eq(certificates.number, number),
+          number === null ? undefined : bearsNumber(number),
           own?.sha256 == null ? undefined : eq(files.sha256, own.sha256),
         ),
       ),
@@ -133,10 +124,21 @@ async function seenBefore(
       certificate_number: row.number ?? first?.certificate_number ?? null,
       purchase_order: row.order,
       sha256: row.sha256,
-      lines: first?.lines ?? [],
+      // What was set aside accounts for no pieces.
+      lines: row.setAsideAt === null ? (first?.lines ?? []) : [],
     };
   });
 }
+
+/** As entered by a person; until then as read. */
+const bearsNumber = (number: string) =>
+  or(
+    eq(certificates.number, number),
+    and(
+      isNull(certificates.number),
+      sql`${readings.content} #>> '{certificates,0,certificate_number}' = ${number}`,
+    ),
+  );
 
 async function todayOf(ctx: Ctx): Promise<string> {
   const [shop] = await ctx.tx

@@ -98,12 +98,6 @@ async function readOrders(ctx: Ctx, which: ReturnType<typeof and>): Promise<Batc
   });
 }
 
-/** What is asked of these requirements together; of two that ask for the same, both count. */
-export function askedTogether(requirements: readonly AskedRequirement[]): Requirements {
-  const together: Record<string, unknown> = {};
-  for (const { figures } of requirements)
-    for (const [key, part] of Object.entries(figures?.asked ?? {}))
-      together[key] =
-        typeof part === 'object' ? { ...(together[key] as object | undefined), ...(part as object) } : part;
-  return together as Requirements;
-}
+/** What is asked in figures, requirement by requirement. */
+export const figuresOf = ({ requirements }: BatchOrder): Requirements[] =>
+  requirements.flatMap(({ figures }) => (figures ? [figures.asked] : []));

@@ -1,12 +1,17 @@
-import type { Discrepancy, SeenCertificate, StatedCertificate } from '@/lib/evidence/certificate/certificate';
+import type {
+  Discrepancy,
+  RequirementVerdict,
+  SeenCertificate,
+  StatedCertificate,
+} from '@/lib/evidence/certificate/certificate';
 import { compare } from '@/lib/evidence/certificate/compare/compare';
 import type { Fact } from '@/lib/evidence/fact';
-import type { Order } from '@/lib/evidence/order';
+import type { Order, Requirements } from '@/lib/evidence/order';
 import type { OpenedFile } from '@/lib/evidence/page';
 import type { Verdict } from '@/lib/certificates/verdict';
 
 import { qualityOf } from './quality';
-import { askedTogether, type AskedRequirement, type BatchOrder } from './orders-of-batch';
+import type { AskedRequirement, BatchOrder } from './orders-of-batch';
 
 /** What the machine would write for one requirement. A person decides. */
 export interface Proposal {
@@ -55,8 +60,6 @@ interface PaperForm {
   characteristic: RegExp;
   against: RegExp;
   fields: RegExp;
-  /** Those of the fields whose reading decides; all of them where it is not said. */
-  decide?: RegExp;
 }
 
 const PAPERS: readonly PaperForm[] = [
@@ -69,7 +72,6 @@ const PAPERS: readonly PaperForm[] = [
     characteristic: /signature|signed/i,
     against: /^signature_missing$/,
     fields: /^(signature_present|signed_by|signer_title|certificate_date)$/,
-    decide: /^(signature_present|certificate_date)$/,
   },
   {
     characteristic: /conformance|statement/i,
@@ -78,45 +80,41 @@ const PAPERS: readonly PaperForm[] = [
   },
 ];
 
+/** What must be found for each word that a requirement says; the other fields are only pointed at. */
+const NEEDED: readonly (readonly [RegExp, RegExp])[] = [
+  [/order/i, /^purchase_order$/],
+  [/revision/i, /^lines\[own\]\.rev$/],
+  [/part number/i, /^lines\[own\]\.part_number$/],
+  [/sign/i, /^signature_present$/],
+  [/\bdated?\b/i, /^certificate_date$/],
+  [/conformance|statement/i, /^conformance_statement$/],
+];
+
 /**
  * Compares a certificate with its batch and says what it would write for each requirement and line.
  *
- * Lines that must prove different things are compared apart, each with what is asked of it.
+ * Each requirement is compared by itself: two may ask for different figures of the same thing, one of the whole batch
+ * and one of a line, and each has its own answer.
  */
 export function propose({ order, requirements }: BatchOrder, compared: Compared): Proposed {
-  const groups = groupsOf(order, requirements);
-  const outcomes = groups.map((group) => ({
-    group,
-    ...compare({ ...compared, order: { ...order, requirements: askedTogether(group.requirements) } }),
+  const against = (asked: Requirements) => compare({ ...compared, order: { ...order, requirements: asked } });
+  const unasked = against({});
+  const answers = requirements.map((requirement) => ({
+    requirement,
+    answer: requirement.figures && against(requirement.figures.asked),
   }));
+  const outcomes = [unasked, ...answers.flatMap(({ answer }) => answer ?? [])];
   const discrepancies = unique(outcomes.flatMap((outcome) => outcome.discrepancies));
   const facts = compared.stated.facts.map((fact) => ({ ...fact, field: named(fact.field, compared.stated) }));
-  const proposals = outcomes.flatMap(({ group, verdicts }) =>
-    group.requirements.flatMap((requirement): Proposal[] => {
-      const { figures } = requirement;
-      if (!figures)
-        return paperProposal(requirement, discrepancies, ownLines(facts, order, requirement.lineNo));
-      const verdict = verdicts.find(
-        (one) =>
-          figures.answeredBy.test(one.requirement) && (one.line === null || one.line === requirement.lineNo),
-      );
-      if (!verdict) return [];
-      const own = placesOf(facts, figures.fields);
-      return [
-        asWellAsRead({
-          requirementId: requirement.id,
-          stated: verdict.stated ?? '',
-          verdict: VERDICT[verdict.verdict],
-          why: verdict.why,
-          facts: own,
-          confidence: weakest(facts, own),
-        }),
-      ];
-    }),
-  );
   return {
-    proposals: proposals.filter(
-      (one, at) => proposals.findIndex(({ requirementId }) => requirementId === one.requirementId) === at,
+    proposals: answers.flatMap(({ requirement, answer }) =>
+      answer && requirement.figures
+        ? figureProposal(requirement.id, {
+            verdicts: beyond(unasked.verdicts, answer.verdicts),
+            facts,
+            own: placesOf(facts, requirement.figures.fields),
+          })
+        : paperProposal(requirement, discrepancies, ownLines(facts, order, requirement.lineNo)),
     ),
     lines: order.lines.flatMap((line) => lineProposal(line, compared.stated)),
     discrepancies,
@@ -124,22 +122,34 @@ export function propose({ order, requirements }: BatchOrder, compared: Compared)
   };
 }
 
-interface Group {
-  requirements: AskedRequirement[];
+/** The verdicts that a requirement adds to those that every certificate of the order gets. */
+function beyond(usual: readonly RequirementVerdict[], all: readonly RequirementVerdict[]) {
+  const keyOf = ({ requirement, line }: RequirementVerdict) => `${requirement} ${line}`;
+  const known = new Set(usual.map(keyOf));
+  return all.filter((one) => !known.has(keyOf(one)));
 }
 
-/** Lines of which the same is asked, with what is asked of the whole batch. */
-function groupsOf(order: Order, requirements: readonly AskedRequirement[]): Group[] {
-  const ofBatch = requirements.filter(({ lineNo }) => lineNo === null);
-  const byAsked = new Map<string, Group>();
-  for (const { line } of order.lines) {
-    const own = requirements.filter(({ lineNo }) => lineNo === line);
-    const key = JSON.stringify(askedTogether([...ofBatch, ...own]));
-    const group = byAsked.get(key) ?? { requirements: [...ofBatch] };
-    group.requirements.push(...own);
-    byAsked.set(key, group);
-  }
-  return [...byAsked.values()];
+/** The worst first: a step is met when its temperature and its time are, and so is each of its cycles. */
+const WORST_FIRST = ['fails', 'cannot_tell', 'not_stated', 'meets'] as const;
+
+function figureProposal(
+  requirementId: string,
+  { verdicts, facts, own }: { verdicts: RequirementVerdict[]; facts: readonly Fact[]; own: number[] },
+): Proposal[] {
+  const worst = verdicts.toSorted(
+    (one, other) => WORST_FIRST.indexOf(one.verdict) - WORST_FIRST.indexOf(other.verdict),
+  )[0];
+  if (!worst) return [];
+  return [
+    asWellAsRead({
+      requirementId,
+      stated: [...new Set(verdicts.flatMap(({ stated }) => stated ?? []))].join(', '),
+      verdict: VERDICT[worst.verdict],
+      why: worst.why,
+      facts: own,
+      confidence: weakest(facts, own),
+    }),
+  ];
 }
 
 function paperProposal(
@@ -150,23 +160,22 @@ function paperProposal(
   const paper = PAPERS.find((one) => one.characteristic.test(characteristic));
   if (!paper) return [];
   const against = discrepancies.find(({ code }) => paper.against.test(code));
+  const needed = NEEDED.filter(([word]) => word.test(characteristic)).map(([, field]) =>
+    placesOf(facts, field),
+  );
+  const unlessMissing = needed.every((places) => places.length > 0) ? 'meets' : 'not_stated';
   const own = placesOf(facts, paper.fields);
   const says = own.map((at) => facts[at]?.value).filter((value) => typeof value === 'string');
   return [
     asWellAsRead({
       requirementId: id,
       stated: [...new Set(says)].join(', '),
-      verdict: paperVerdict(against !== undefined, own.length > 0),
+      verdict: against ? 'does_not_meet' : unlessMissing,
       why: against?.message ?? '',
       facts: own,
-      confidence: weakest(facts, paper.decide ? placesOf(facts, paper.decide) : own),
+      confidence: weakest(facts, needed.flat()),
     }),
   ];
-}
-
-function paperVerdict(isAgainst: boolean, isStated: boolean): Verdict {
-  if (isAgainst) return 'does_not_meet';
-  return isStated ? 'meets' : 'not_stated';
 }
 
 /** The facts with the lines that are of this line of the order named so; of the whole batch all are. */

@@ -8,7 +8,7 @@ import type { JobTools } from '@/lib/jobs/job';
 import { readObject } from '@/lib/storage/object-store';
 
 import { READER_EDITION } from './kept-reading';
-import { askedTogether, readBatchOrder } from './orders-of-batch';
+import { figuresOf, readBatchOrder } from './orders-of-batch';
 import type { ChartAsk, readDocumentQueue } from './read-document-queue';
 import { ReadingChild } from './reading-child';
 
@@ -67,12 +67,12 @@ export async function readDocument(
 const NOTHING_ASKED = {
   fault: {
     code: 'nothing_asked',
-    message: 'The batch asks for no temperature. Say what the chart is to be held against.',
+    message: 'The batch asks for no temperature, or for several. Say what the chart is to be held against.',
   },
 };
 
 async function askOfBatch(tools: JobTools, shopId: string, batchId: string | null): Promise<ChartAsk | null> {
   const order = batchId === null ? null : await tools.inShop(shopId, (ctx) => readBatchOrder(ctx, batchId));
-  const requirement = order && askedOfChart(askedTogether(order.requirements));
+  const requirement = order && askedOfChart(figuresOf(order));
   return requirement && { requirement, corrections: {} };
 }

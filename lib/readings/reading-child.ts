@@ -31,7 +31,8 @@ export class ReadingChild {
    * @throws where something of ours went wrong; the file may be read again.
    */
   async read(file: Omit<ReadingRequest, 'id'>): Promise<Outcome> {
-    const child = this.child ?? this.start();
+    // It may have died of itself since the last file.
+    const child = this.child?.connected ? this.child : this.start();
     const id = ++this.last;
     const ended = new AbortController();
     try {
@@ -78,7 +79,9 @@ export class ReadingChild {
   private async tooLarge(child: ChildProcess, signal: AbortSignal): Promise<Outcome> {
     for (;;) {
       await pause(LOOK_EVERY_MS, signal);
-      if ((await bytesOf(child.pid)) > this.limits.bytes) break;
+      const bytes = await bytesOf(child.pid);
+      // While it was looked at, the file may have been read to its end; the process is the next one's then.
+      if (bytes > this.limits.bytes && !signal.aborted) break;
     }
     this.close();
     return {
@@ -120,8 +123,12 @@ function answerOf(child: ChildProcess, request: ReadingRequest): Promise<Reading
 function pause(milliseconds: number, signal: AbortSignal): Promise<void> {
   return new Promise((settle) => {
     if (signal.aborted) return;
-    const timer = setTimeout(settle, milliseconds);
-    signal.addEventListener('abort', () => clearTimeout(timer), { once: true });
+    const stop = () => clearTimeout(timer);
+    const timer = setTimeout(() => {
+      signal.removeEventListener('abort', stop);
+      settle();
+    }, milliseconds);
+    signal.addEventListener('abort', stop, { once: true });
   });
 }
 

@@ -78,6 +78,7 @@ export interface TableOfInvoice {
 export function tablesOn(lines: readonly Line[], sign: DecimalSign): TableOfInvoice[] {
   const tables = tablesOf<Heading>(lines, {
     read: headingOf,
+    holds: () => true,
     endsTable: (segment) => endsTable(segment, lines),
     anchors: (heading) => heading === 'amount',
   });

@@ -10,8 +10,6 @@ const picture = ({ data, width, height, dpi }: Raster) =>
 export const asJpeg = (page: Raster, quality = 80): Promise<Uint8Array> =>
   picture(page).jpeg({ quality }).toBuffer();
 
-export const asPng = (page: Raster): Promise<Uint8Array> => picture(page).png().toBuffer();
-
 /** One TIFF with all pages, as a scanner's feeder writes it. */
 export async function asTiff(pages: readonly Raster[]): Promise<Uint8Array> {
   const single = await Promise.all(pages.map((page) => picture(page).png().toBuffer()));
