@@ -1,3 +1,4 @@
+import { recordAudit } from '@/lib/audit/record-audit';
 import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
 
@@ -10,5 +11,11 @@ export async function readCertificateAgain(ctx: Ctx, { certificateId }: { certif
   const { certificate, reading } = await findReading(ctx, certificateId);
   if (reading) await readOnceMore(ctx, reading.id);
   else await requestReading(ctx, { fileId: certificate.fileId, kind: 'certificate' });
+  await recordAudit(ctx, {
+    action: 'certificate.read_again',
+    entity: 'certificate',
+    entityId: certificateId,
+    after: { file: certificate.fileId },
+  });
   return { state: 'waiting' as const };
 }

@@ -17,7 +17,7 @@ interface CodeField {
   readonly said: readonly RegExp[];
 }
 
-const CODE = String.raw`([A-Z]{0,6}[-\s]?(?=[A-Z0-9./-]*\d)[A-Z0-9][A-Z0-9./-]*[A-Z0-9]|\d{3,})`;
+const CODE = String.raw`((?:[A-Z]{1,6}[-\s]?)?(?=[A-Z0-9./-]*\d)[A-Z0-9][A-Z0-9./-]*[A-Z0-9]|\d{3,})`;
 
 export const CERTIFICATE_NUMBER: CodeField = {
   keys: ['certificate_number'],
@@ -54,13 +54,16 @@ export const BATCH: CodeField = {
   ],
 };
 
+/** A sum of money beside words of an order is no number of it. */
+const AMOUNT = /^\d{1,3}(?:[.,]?\d{3})*[.,]\d{2}$/;
+
 /** Every place that gives the code. */
 export function codesFor(paper: Paper, field: CodeField): Candidate<string>[] {
   const asked = paper.answers.flatMap((answer) => fromAnswer(answer, field));
   const said = paper.paragraphs.flatMap((paragraph) =>
     field.said.flatMap((pattern) => inSentence(paragraph, pattern)),
   );
-  return [...asked, ...said];
+  return [...asked, ...said].filter(({ value }) => !AMOUNT.test(value));
 }
 
 function fromAnswer(answer: Answer, field: CodeField): Candidate<string>[] {

@@ -203,7 +203,12 @@ describe('corrections win over guesses', () => {
     expect(readChart(file, ASKED).verdict).toBe('fail');
     const corrected = readChart(file, ASKED, { channels: [{ column: 2, excluded: true, name: 'Spare' }] });
     expect(corrected.verdict).toBe('pass');
-    expect(corrected.understood.channels[1]).toEqual({ name: 'Spare', role: 'load', excluded: 'by_hand' });
+    expect(corrected.understood.channels[1]).toEqual({
+      column: 2,
+      name: 'Spare',
+      role: 'load',
+      excluded: 'by_hand',
+    });
     expect(readChart(file, ASKED, { channels: [{ column: 2, role: 'other' }] }).soak_minutes).toBe(5.5);
   });
 
