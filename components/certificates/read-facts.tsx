@@ -6,10 +6,10 @@ import { Button } from '@/components/ui/button';
 import { TextField } from '@/components/ui/field';
 import { HowWell } from '@/components/ui/how-well';
 import { Cell, Row, Table } from '@/components/ui/table';
+import { fieldWords } from '@/lib/readings/field-words';
 import { correctReading, getCertificateReading, type CertificateReading } from '@/lib/readings/contract';
 import { qualityOf } from '@/lib/readings/quality';
 
-import { fieldWords } from './field-words';
 import type { Proving } from './use-proving';
 
 const COLUMNS = [

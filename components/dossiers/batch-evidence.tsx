@@ -9,6 +9,7 @@ import { VerdictWord } from '@/components/ui/verdict';
 import type { DossierBatch } from '@/lib/dossiers/content';
 
 import { conditionsWords, processWords, reasonWords, receiptWords } from './evidence-words';
+import { ReadingsEvidence } from './readings-evidence';
 import { When } from './when';
 
 interface BatchEvidenceProps {
@@ -48,6 +49,7 @@ export function BatchEvidence({ batch, zone }: BatchEvidenceProps) {
       )}
       <Facts batch={batch} zone={zone} />
       <Requirements batch={batch} />
+      <ReadingsEvidence batch={batch} zone={zone} />
       {batch.nonconformances.map((one) => (
         <Nonconformance key={one.number} one={one} zone={zone} />
       ))}

@@ -9,6 +9,8 @@ import type { JobTools } from '@/lib/jobs/job';
 import { getObject } from '@/lib/storage/object-store';
 
 import type { assembleDossierQueue } from './assemble-dossier-queue';
+import type { DossierFile } from './content';
+import { drawCharts } from './draw-charts';
 import { ChangedOriginal, makeArchive } from './make-archive';
 import { readDossier } from './read-dossier';
 import { renderDossier } from './render-dossier';
@@ -50,13 +52,10 @@ async function make(tools: JobTools, { shopId, dossierId }: Payload): Promise<vo
   if (!asked) return;
   const { dossier, content } = asked;
   const name = `${content.lot.number} ${content.part.number} rev ${content.part.revision}`;
-  const document = await renderDossier(content, dossier.statedAt);
-  const archive = await makeArchive({
-    content,
-    document,
-    statedAt: dossier.statedAt,
-    open: async (file) => (await getObject(file.storageKey)).body,
-  });
+  const open = async (file: DossierFile) => (await getObject(file.storageKey)).body;
+  const pictures = await drawCharts(content, open);
+  const document = await renderDossier(content, { statedAt: dossier.statedAt, pictures });
+  const archive = await makeArchive({ content, document, statedAt: dossier.statedAt, open });
   const stored = { shopId, batchId: null };
   const pdf = await storeMadeFile(tools, {
     ...stored,

@@ -1,3 +1,7 @@
+import type { ChartCorrections } from '@/lib/evidence/chart/corrections';
+import type { JudgedChart } from '@/lib/evidence/chart/judged-chart';
+import type { ChartRequirement } from '@/lib/evidence/chart/requirement';
+
 /** All that a dossier says of one lot. Plain values, so that the page, the document and the archive say the same. */
 export interface DossierContent {
   shop: { name: string; address: string[]; zone: string };
@@ -57,6 +61,17 @@ export interface DossierBatch {
       by: string;
     }[];
   }[];
+  /** What a person put in place of what the machine read on a certificate, the earliest first; the later of a field counts. */
+  corrections: {
+    certificate: string;
+    field: string;
+    read: string | null;
+    corrected: string;
+    by: string;
+    at: string;
+  }[];
+  /** Those that were read: against what, as understood by whom, and what came of it. */
+  charts: DossierChart[];
   signatures: {
     certificate: string;
     pieces: number;
@@ -81,6 +96,18 @@ export interface DossierBatch {
     }[];
   }[];
   releases: { at: string; by: string; pieces: number; to: string }[];
+}
+
+export interface DossierChart {
+  id: string;
+  fileId: string;
+  fileName: string;
+  requirement: ChartRequirement;
+  corrections: ChartCorrections;
+  verdict: JudgedChart['verdict'];
+  soakMinutes: number | null;
+  /** In whole sentences. */
+  why: string;
 }
 
 export interface DossierFile {

@@ -47,8 +47,7 @@ export async function makeArchive({ content, document, statedAt, open }: Archive
   );
   const taken = new Set<string>();
   for (const file of content.files) {
-    const original = await buffer(await open(file));
-    if (sha256Of(original) !== file.sha256) throw new ChangedOriginal(file.name);
+    const original = unchanged(file, await buffer(await open(file)));
     add(
       uniquePath(file, taken),
       original,
@@ -65,6 +64,12 @@ export async function makeArchive({ content, document, statedAt, open }: Archive
   });
   await zip.finalize();
   return bytes;
+}
+
+/** @throws ChangedOriginal */
+export function unchanged(file: Pick<DossierFile, 'name' | 'sha256'>, original: Buffer): Buffer {
+  if (sha256Of(original) !== file.sha256) throw new ChangedOriginal(file.name);
+  return original;
 }
 
 /** Where bytes lie in our storage is nobody's business outside. */

@@ -91,6 +91,11 @@ async function readBatches(ctx: Pick<Ctx, 'tx'>, lotId: string): Promise<Dossier
           'decisions', coalesce((select jsonb_agg(jsonb_build_object('certificate', coalesce(c.number, 'without number'), 'stated', d.stated, 'verdict', d.verdict, 'overrideReason', d.override_reason, 'by', d.decided_by) order by d.decided_at)
             from decisions d join certificates c on c.id = d.certificate_id where d.requirement_id = q.id), '[]')) order by q.seq, q.id)
         from requirements q where q.batch_id = b.id and (q.line_id is null or q.line_id = l.id)), '[]') as requirements,
+      coalesce((select jsonb_agg(jsonb_build_object('certificate', coalesce(c.number, 'without number'), 'field', k.field, 'read', k.read, 'corrected', k.corrected, 'by', k.corrected_by, 'at', ${iso('k.corrected_at')}) order by k.id)
+        from reading_corrections k join readings r on r.id = k.reading_id join certificates c on c.file_id = r.file_id where c.batch_id = b.id), '[]') as corrections,
+      coalesce((select jsonb_agg(jsonb_build_object('id', h.id, 'fileId', f.id, 'fileName', f.name, 'requirement', r.content->'requirement', 'corrections', r.content->'corrections',
+          'verdict', r.content#>'{judged,verdict}', 'soakMinutes', r.content#>'{judged,soak_minutes}', 'why', r.content#>'{judged,why}') order by h.id)
+        from charts h join files f on f.id = h.file_id join readings r on r.file_id = f.id where h.batch_id = b.id and r.kind = 'chart' and r.state = 'read'), '[]') as charts,
       coalesce((select jsonb_agg(jsonb_build_object('certificate', coalesce(c.number, 'without number'), 'pieces', v.pieces, 'signer', g.signer_name, 'at', ${iso('g.signed_at')}, 'sentence', g.sentence, 'seal', g.seal, 'fileSha256', g.file_sha256) order by g.signed_at)
         from coverage v join signatures g on g.id = v.signature_id join certificates c on c.id = v.certificate_id where v.line_id = l.id), '[]') as signatures,
       coalesce((select jsonb_agg(jsonb_build_object('number', n.number, 'kind', n.kind, 'what', n.what, 'pieces', n.pieces,

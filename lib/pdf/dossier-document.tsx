@@ -1,22 +1,27 @@
 import { Document, Text, View } from '@react-pdf/renderer';
+import type { ReactNode } from 'react';
 
 import type { DossierBatch, DossierContent } from '@/lib/dossiers/content';
 import { PROCESS_WORDS, type Process } from '@/lib/trade/process';
 
+import type { ChartPicture } from './chart-picture';
+import { DossierCharts, DossierCorrections } from './dossier-readings';
 import { COND, MONO } from './fonts';
 import { INK, RULE, type } from './look';
-import { Asked, Cells, Heading, Paper } from './paper-parts';
+import { Asked, Cells, contentWidth, Heading, Paper } from './paper-parts';
 import { counted, paperMoment } from './paper-words';
 
 interface DossierDocumentProps {
   content: DossierContent;
+  /** Of its charts, by the chart's id. */
+  pictures: ReadonlyMap<string, ChartPicture>;
   statedAt: Date;
   hash: string;
   sheet: 'letter' | 'a4';
 }
 
 /** All the evidence of a lot: what it is, where every piece is, each outside step with its proof, each movement, each original. */
-export function DossierDocument({ content, statedAt, hash, sheet }: DossierDocumentProps) {
+export function DossierDocument({ content, pictures, statedAt, hash, sheet }: DossierDocumentProps) {
   const { shop, lot, part } = content;
   const moment = (at: string) => paperMoment(at, shop.zone);
   return (
@@ -92,7 +97,12 @@ export function DossierDocument({ content, statedAt, hash, sheet }: DossierDocum
           />
         ))}
         {content.batches.map((batch) => (
-          <BatchEvidence key={`${batch.id} ${batch.lineNo}`} batch={batch} moment={moment} />
+          <BatchEvidence
+            key={`${batch.id} ${batch.lineNo}`}
+            batch={batch}
+            moment={moment}
+            charts={<DossierCharts charts={batch.charts} pictures={pictures} width={contentWidth(sheet)} />}
+          />
         ))}
         <Movements content={content} moment={moment} />
         <Originals content={content} />
@@ -103,7 +113,13 @@ export function DossierDocument({ content, statedAt, hash, sheet }: DossierDocum
 
 type Moment = (at: string) => string;
 
-function BatchEvidence({ batch, moment }: { batch: DossierBatch; moment: Moment }) {
+interface BatchEvidenceProps {
+  batch: DossierBatch;
+  moment: Moment;
+  charts: ReactNode;
+}
+
+function BatchEvidence({ batch, moment, charts }: BatchEvidenceProps) {
   return (
     <View style={{ marginTop: 8 }}>
       <Heading
@@ -157,6 +173,8 @@ function BatchEvidence({ batch, moment }: { batch: DossierBatch; moment: Moment 
             .join('; ')}
         />
       ))}
+      <DossierCorrections corrections={batch.corrections} moment={moment} />
+      {charts}
       {batch.nonconformances.map((one) => (
         <Asked
           key={one.number}

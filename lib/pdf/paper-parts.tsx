@@ -120,7 +120,8 @@ export function TagHead({
   );
 }
 
-const circle = (x: number, y: number, r: number): string =>
+/** A full circle as the path of a drawing. */
+export const circle = (x: number, y: number, r: number): string =>
   `M${x - r} ${y}a${r} ${r} 0 1 0 ${2 * r} 0a${r} ${r} 0 1 0 ${-2 * r} 0Z`;
 
 export interface Cell {

@@ -1,17 +1,6 @@
 import type { LineLook } from './line-look';
+import { BAND, BAND_INK, GRID, ON_PAPER, WINDOW } from './on-paper';
 import type { ChartPaths, PanelPaths } from './paths';
-
-/** The day's colours of the design, for paper. */
-const ON_PAPER: Record<LineLook['ink'], string> = {
-  ink: '#1E2326',
-  'dispatched-ink': '#6F5410',
-  'atproc-ink': '#7D4D16',
-  'settled-ink': '#3B607D',
-  'returned-ink': '#5C3F6D',
-  quiet: '#565C60',
-  'held-ink': '#8E2F20',
-};
-const [RULE, BAND, BAND_INK, WINDOW] = ['#D8D2C4', '#DDE7F0', '#26527B', '#F7EDD0'] as const;
 
 /** A chart as one SVG document for a paper: fonts of the reader, colours of the day, everything named in words. */
 export function chartSvg(paths: ChartPaths): string {
@@ -44,7 +33,7 @@ const panelSvg = ({ top, bottom, ticks, band, lines }: PanelPaths, left: number,
   [
     ...ticks.map(
       ({ at, says }) =>
-        `<path d="M${left} ${at}H${right}" stroke="${RULE}"/><text x="${left - 6}" y="${at + 4}" text-anchor="end" fill="${ON_PAPER.quiet}">${says}</text>`,
+        `<path d="M${left} ${at}H${right}" stroke="${GRID}"/><text x="${left - 6}" y="${at + 4}" text-anchor="end" fill="${ON_PAPER.quiet}">${says}</text>`,
     ),
     `<rect x="${left}" y="${band.upper}" width="${right - left}" height="${Math.max(0.5, band.lower - band.upper)}" fill="${BAND}" fill-opacity="0.7"/>`,
     `<path d="M${left} ${band.upper}H${right}M${left} ${band.lower}H${right}" stroke="${BAND_INK}"/>`,
