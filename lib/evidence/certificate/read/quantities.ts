@@ -1,9 +1,6 @@
 /** Whether a document writes 28,5 for twenty-eight and a half. */
 export type DecimalSign = '.' | ',';
 
-/** A number in figures with either sign, thousands set apart or not. */
-export const NUMBER = String.raw`\d{1,3}(?:[ ,.]\d{3})+(?![\d])|\d+(?:[.,]\d+)?|[.,]\d+`;
-
 /**
  * A number as written.
  *
