@@ -16,6 +16,7 @@ export const SHOP_GRANTS: Record<string, readonly Verb[] | Columns> = {
   processors: READ,
   shop_processors: KEEP,
   approvals: KEEP,
+  equipment: KEEP,
   counters: KEEP,
   users: {
     select: ['id', 'email', 'name', 'active', 'units', 'single_keys', 'session_version', 'created_at'],
@@ -48,6 +49,9 @@ export const SHOP_GRANTS: Record<string, readonly Verb[] | Columns> = {
   receipt_photos: ADD,
   certificates: KEEP,
   charts: ADD,
+  readings: KEEP,
+  reading_corrections: ADD,
+  intake: KEEP,
   decisions: KEEP,
   signatures: ADD,
   coverage: ADD,

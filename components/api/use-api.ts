@@ -28,12 +28,21 @@ export function useRead<D extends Declaration>(declaration: D, input: InputOf<D>
 export function useLazyRead<D extends Declaration>(
   declaration: D,
   input: InputOf<D>,
-  options: { enabled?: boolean; refreshEveryMs?: number } = {},
+  options: {
+    enabled?: boolean;
+    refreshEveryMs?: number;
+    /** Looks again only while the last answer says so. */
+    refreshWhile?: (data: OutputOf<D>) => boolean;
+  } = {},
 ) {
+  const { refreshEveryMs, refreshWhile } = options;
   return useQuery<OutputOf<D>>({
     ...optionsOf(declaration, input),
     enabled: options.enabled ?? true,
-    refetchInterval: options.refreshEveryMs ?? false,
+    refetchInterval: ({ state: { data } }) =>
+      refreshEveryMs === undefined || (data !== undefined && refreshWhile?.(data) === false)
+        ? false
+        : refreshEveryMs,
   });
 }
 

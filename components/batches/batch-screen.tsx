@@ -17,6 +17,7 @@ import { BatchHead, HowItStands } from './batch-head';
 import { ChecksSection } from './checks-section';
 import { LinesSection } from './lines-section';
 import { LinkSection } from './link-section';
+import { LoadPlanSection } from './load-plan-section';
 import { PriceSection } from './price-section';
 import { RequirementsSection } from './requirements-section';
 import { RideAlongSection } from './ride-along-section';
@@ -45,6 +46,7 @@ function Building({ batchId, isOpen }: { batchId: string; isOpen: boolean }) {
       main={
         <>
           <LinesSection batchId={batchId} />
+          {isOpen && <LoadPlanSection batchId={batchId} />}
           <RequirementsSection batchId={batchId} />
           {isOpen && <TermsSection batchId={batchId} />}
           {isOpen && <RideAlongSection batchId={batchId} />}

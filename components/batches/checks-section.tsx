@@ -85,7 +85,7 @@ const ANCHORS: Partial<Record<BatchFinding['waysOut'][number]['way'], string>> =
   set_days: '#terms',
   set_prices: '#lines',
   set_requirements: '#requirements',
-  set_loads: '#lines',
+  set_loads: '#load-plan',
   choose_processor: '#terms',
 };
 
@@ -103,7 +103,7 @@ function WaysOut({
   const aside = useBatchWrite(putBatchAside);
   if (!mayBuild) return null;
   const seen = { batchId: batch.id, version: batch.version };
-  return finding.waysOut.map(({ way, says, lineId }) => {
+  return finding.waysOut.map(({ way, says, lineId, partId }) => {
     const anchor = ANCHORS[way];
     if (anchor) {
       return (
@@ -115,6 +115,12 @@ function WaysOut({
     if (way === 'see_processor')
       return (
         <Link key={way} href={`/processors/${batch.processorId}`} className="lw-word-button">
+          {says}
+        </Link>
+      );
+    if (way === 'state_order' && partId)
+      return (
+        <Link key={way} href={`/parts/${partId}/edit`} className="lw-word-button">
           {says}
         </Link>
       );

@@ -10,7 +10,13 @@ import { addLine, changeLine, removeLine, type Batch, type BatchLine } from '@/l
 import { useBatchWrite } from './use-batch-write';
 
 const Price = amountField({ name: 'The price' });
-const LOADS = [1, 2, 3, 4, 5, 6].map((load) => ({ value: String(load), says: `load ${load}` }));
+const MOST_OFFERED = 6;
+/** The first few; more where the plan has set more. */
+const loadsFor = (loadNo: number | null) =>
+  Array.from({ length: Math.max(MOST_OFFERED, loadNo ?? 0) }, (_, at) => ({
+    value: String(at + 1),
+    says: `load ${at + 1}`,
+  }));
 
 /** Pieces, price and load of one line, under its row. */
 export function LineEditor({ batch, line, onDone }: { batch: Batch; line: BatchLine; onDone: () => void }) {
@@ -96,7 +102,7 @@ export function LineEditor({ batch, line, onDone }: { batch: Batch; line: BatchL
         className="w-32"
         label="Load"
         empty="no load"
-        options={LOADS}
+        options={loadsFor(line.loadNo)}
         value={typed.load}
         onChange={(event) => setTyped({ ...typed, load: event.currentTarget.value })}
       />

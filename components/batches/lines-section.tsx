@@ -13,8 +13,18 @@ import { Cell, Row, Table } from '@/components/ui/table';
 import { getBatch, getBatchLines, type BatchLine } from '@/lib/batches/contract';
 import { PROCESS_WORDS } from '@/lib/trade/process';
 
+import { FigureKnown } from './figure-known';
 import { LineEditor } from './line-editor';
-import { areaText, areaUnit, massText, massUnit, sumOfKnown, type Units } from './measures';
+import {
+  areaKnown,
+  areaText,
+  areaUnit,
+  massKnown,
+  massText,
+  massUnit,
+  sumOfKnown,
+  type Units,
+} from './measures';
 
 /** What is in the batch, line by line; a line opens in place to be changed while the batch is here. */
 export function LinesSection({ batchId }: { batchId: string }) {
@@ -126,10 +136,10 @@ function LineRow({
         {line.pieces.toLocaleString('en-US')}
       </Cell>
       <Cell figure head={`Mass, ${massUnit(units)}`}>
-        {line.massG !== null && massText(line.massG * line.pieces, units)}
+        <FigureKnown known={massKnown(line)} text={(grams) => massText(grams, units)} />
       </Cell>
       <Cell figure head={`Area, ${areaUnit(units)}`}>
-        {line.areaMm2 !== null && areaText(line.areaMm2 * line.pieces, units)}
+        <FigureKnown known={areaKnown(line)} text={(mm2) => areaText(mm2, units)} />
       </Cell>
       <Cell figure head="Each">
         {line.unitPriceMinor > 0 && <Amount minor={line.unitPriceMinor} />}
@@ -149,8 +159,6 @@ function LineRow({
 }
 
 function SumRow({ lines, units, open }: { lines: readonly BatchLine[]; units: Units; open: boolean }) {
-  const mass = sumOfKnown(lines.map((line) => line.massG && line.massG * line.pieces));
-  const area = sumOfKnown(lines.map((line) => line.areaMm2 && line.areaMm2 * line.pieces));
   const loads = new Set(lines.flatMap((line) => line.loadNo ?? [])).size;
   return (
     <Row state="sum">
@@ -160,10 +168,10 @@ function SumRow({ lines, units, open }: { lines: readonly BatchLine[]; units: Un
         {lines.reduce((sum, line) => sum + line.pieces, 0).toLocaleString('en-US')}
       </Cell>
       <Cell figure head={`Mass, ${massUnit(units)}`}>
-        {mass !== null && massText(mass, units)}
+        <FigureKnown known={sumOfKnown(lines.map(massKnown))} text={(grams) => massText(grams, units)} />
       </Cell>
       <Cell figure head={`Area, ${areaUnit(units)}`}>
-        {area !== null && areaText(area, units)}
+        <FigureKnown known={sumOfKnown(lines.map(areaKnown))} text={(mm2) => areaText(mm2, units)} />
       </Cell>
       <Cell />
       <Cell right>{loads > 0 && `${loads} ${loads === 1 ? 'load' : 'loads'}`}</Cell>

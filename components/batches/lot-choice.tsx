@@ -6,7 +6,8 @@ import { fieldAttributes, FieldError } from '@/components/ui/field';
 import { Cell, Row, Table } from '@/components/ui/table';
 import type { WaitingLot } from '@/lib/batches/waiting-contract';
 
-import { massText, massUnit } from './measures';
+import { FigureKnown } from './figure-known';
+import { massKnown, massText, massUnit } from './measures';
 
 interface LotChoiceProps {
   rows: readonly WaitingLot[];
@@ -65,7 +66,7 @@ export function LotChoice({ rows, typed, wrong, onType }: LotChoiceProps) {
               {[row.conditionBefore, row.targetCondition].filter(Boolean).join(' to ')}
             </Cell>
             <Cell figure head={`Mass, ${massUnit(units)}`}>
-              {row.massG !== null && massText(row.massG * row.pieces, units)}
+              <FigureKnown known={massKnown(row)} text={(grams) => massText(grams, units)} />
             </Cell>
             <Cell figure head="Waits">
               {row.pieces.toLocaleString('en-US')}

@@ -10,6 +10,7 @@ import { Cell, Row, Table } from '@/components/ui/table';
 import { getBatch, getBatchLines, type BatchLine, type Requirement } from '@/lib/batches/contract';
 import { limitWords } from '@/lib/parts/limit-words';
 
+import { ProposedRequirements } from './proposed-requirements';
 import { RequirementEditor } from './requirement-editor';
 
 const COLUMNS = [{ says: 'What' }, { says: 'Limit' }, { says: 'From' }];
@@ -20,6 +21,7 @@ export function RequirementsSection({ batchId }: { batchId: string }) {
   const { data } = useRead(getBatchLines, { batchId });
   const mayBuild = useMay('batch.build') && batch.dispatchedAt === null && batch.cancelledAt === null;
   const [openId, setOpen] = useState<string | null>(null);
+  const [isProposing, setProposing] = useState(false);
   const groups = groupsOf(data.lines, data.requirements).filter(
     (group) => mayBuild || group.requirements.length > 0,
   );
@@ -28,7 +30,16 @@ export function RequirementsSection({ batchId }: { batchId: string }) {
       id="requirements"
       title="Must be proved, on paper"
       note={batch.dispatchedAt ? 'frozen at dispatch' : 'from the route of each part; type over what differs'}
+      action={
+        mayBuild &&
+        data.lines.length > 0 && (
+          <Button look="word" aria-expanded={isProposing} onClick={() => setProposing(!isProposing)}>
+            Propose from the tables
+          </Button>
+        )
+      }
     >
+      {mayBuild && isProposing && <ProposedRequirements batch={batch} onDone={() => setProposing(false)} />}
       {groups.length === 0 && <Empty says="No proof was asked." />}
       {groups.map((group) => {
         const opened = group.changes.find((change) => change.id === openId);

@@ -15,7 +15,8 @@ import { addLine, getBatch, getBatchLines, type Batch } from '@/lib/batches/cont
 import { expectedPrice } from '@/lib/batches/expected-price';
 import { listWaitingLots, type WaitingLot } from '@/lib/batches/waiting-contract';
 
-import { massText, massUnit, type Units } from './measures';
+import { FigureKnown } from './figure-known';
+import { massKnown, massText, massUnit, type Units } from './measures';
 import { useBatchWrite } from './use-batch-write';
 
 /** Lots that wait for the same step: while there is room under the lot minimum they cost nothing more. */
@@ -105,7 +106,7 @@ function RideAlong({ batch, row, units }: { batch: Batch; row: WaitingLot; units
         {row.pieces.toLocaleString('en-US')}
       </Cell>
       <Cell figure head={`Mass, ${massUnit(units)}`}>
-        {row.massG !== null && massText(row.massG * row.pieces, units)}
+        <FigureKnown known={massKnown(row)} text={(grams) => massText(grams, units)} />
       </Cell>
       <Cell right>
         {mayBuild && (

@@ -40,6 +40,29 @@ export function TravellerSheet({ says, small = false }: { says: TravellerSays; s
       <SheetLines lines={says.lines} small={small} />
       {says.note && <p className="mt-2">{says.note}</p>}
       <div className={small ? 'mt-1.5' : 'mt-5 grid gap-6 md:grid-cols-2'}>
+        {says.furnaceLoads?.loads.map((load) => (
+          <SheetList
+            key={`${load.number} ${load.lines.join()}`}
+            title={`Load ${load.number}${says.furnaceLoads?.areSet ? '' : ', as planned'}, ${linesWords(load.lines)}`}
+            small={small}
+            items={load.rows.map(({ name, says: what, rest }) =>
+              [`${name}: ${what}`, rest].filter(Boolean).join(', '),
+            )}
+          />
+        ))}
+        {says.furnaceLoads && says.furnaceLoads.apart.length > 0 && (
+          <SheetList title="The loads may not be joined" small={small} items={says.furnaceLoads.apart} />
+        )}
+        {says.samples && says.samples.length > 0 && (
+          <SheetList
+            title="Samples"
+            small={small}
+            items={says.samples.map(
+              ({ lineNo, inspect, pieces: of, says: what, plan }) =>
+                `line ${lineNo}: ${inspect} of ${of}, ${what}${small ? '' : ` (${plan})`}`,
+            )}
+          />
+        )}
         <SheetList
           title="Must be proved"
           small={small}
@@ -69,6 +92,8 @@ export function TravellerSheet({ says, small = false }: { says: TravellerSays; s
         <p className="mt-5 text-source">
           The drawing, the order and the governing specification at the revision named come first, then this
           page. It releases nothing by itself.
+          {says.furnaceLoads &&
+            ` Figures of the loads are reference values, and what must be proved goes before them: ${says.furnaceLoads.sources.join('; ')}.`}
         </p>
       )}
     </div>

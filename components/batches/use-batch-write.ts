@@ -9,20 +9,24 @@ import type { Declaration, InputOf, OutputOf } from '@/lib/api/endpoint';
 import { listAudit } from '@/lib/audit/contract';
 import { getBatchChecks } from '@/lib/batches/check-contract';
 import { getBatch, getBatchLines, listBatches } from '@/lib/batches/contract';
+import { getLoadPlan } from '@/lib/batches/load-contract';
 import { getTraveller, listBatchDocuments } from '@/lib/batches/paper-contract';
 import { listWaitingLots, listWaitingSteps } from '@/lib/batches/waiting-contract';
+import { proposeForBatch } from '@/lib/requirements/contract';
 import { getGate } from '@/lib/stock/contract';
 
 const SHOWN = [
   getBatch,
   getBatchLines,
   getBatchChecks,
+  getLoadPlan,
   getTraveller,
   listBatchDocuments,
   listBatches,
   listWaitingLots,
   listWaitingSteps,
   listAudit,
+  proposeForBatch,
   getGate,
 ];
 

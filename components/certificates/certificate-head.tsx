@@ -56,7 +56,9 @@ function NumberAndDate({ proving }: { proving: Proving }) {
   const { certificate } = proving.data;
   const form = useForm({
     resolver: zodResolver(Fields),
-    defaultValues: { number: certificate.number ?? '', datedOn: certificate.datedOn ?? '' },
+    // What is confirmed as read elsewhere on the page comes in here, beside what is being typed.
+    values: { number: certificate.number ?? '', datedOn: certificate.datedOn ?? '' },
+    resetOptions: { keepDirtyValues: true },
   });
   const write = useWrite(recordCertificate, { refreshes: [getCertificate, listCertificates] });
   const { errors, isDirty } = form.formState;

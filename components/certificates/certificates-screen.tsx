@@ -14,6 +14,7 @@ import { BatchTag } from '@/components/ui/tag';
 import { listCertificates, type CertificateRow } from '@/lib/certificates/contract';
 
 import { certificateName, STATE_WORDS } from './certificate-words';
+import { IntakeSection } from './intake-section';
 
 const COLUMNS = [
   { says: 'Certificate' },
@@ -48,6 +49,7 @@ export function CertificatesScreen() {
           </>
         }
       />
+      <IntakeSection />
       {isPending && <Loading label="Loading certificates" rows={8} />}
       {error && <Failing says="The certificates could not be read." again={error.message} />}
       {data && rows.length === 0 && (

@@ -26,8 +26,10 @@ function LineRow({ line, proving }: { line: ProvedLine; proving: Proving }) {
   const canEdit = proving.canEdit && line.coverable > 0;
   const entered = proving.pieces[line.id] ?? null;
   const verdict = verdictOf(line, entered);
+  const read = proving.reading.piecesOf(line.lineNo)?.pieces;
   const confirm = () => {
-    if (entered === null) proving.setPieces(line.id, line.coverable);
+    if (entered === null)
+      proving.setPieces(line.id, read === undefined ? line.coverable : Math.min(read, line.coverable));
     proving.onward(line.id);
   };
   return (
@@ -49,8 +51,9 @@ function LineRow({ line, proving }: { line: ProvedLine; proving: Proving }) {
           {line.pieces}
         </Cell>
         <Cell code strong head="This one covers" className="text-[0.78rem]">
-          {entered ?? (line.here > 0 ? line.here : '')}
+          {entered ?? (line.here > 0 ? line.here : <span className="font-normal">{read}</span>)}
         </Cell>
+        <Cell className="max-md:hidden" />
         <Cell>
           <VerdictWord verdict={verdict} says={verdictWords(line, entered)} />
         </Cell>
@@ -84,7 +87,7 @@ function LineOpen({ line, proving, canEdit }: { line: ProvedLine; proving: Provi
   const [holding, setHolding] = useState(false);
   return (
     <tr role="row">
-      <td role="cell" colSpan={6} className="border-b-heavy border-ink bg-bench">
+      <td role="cell" colSpan={7} className="border-b-heavy border-ink bg-bench">
         <div className="flex flex-col gap-2.5 py-2 pl-9 max-md:pl-0">
           <p className="text-second">
             {line.partName}, lot {line.lotNumber}: <Pieces count={line.pieces} /> ordered,{' '}

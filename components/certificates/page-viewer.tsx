@@ -1,9 +1,11 @@
 'use client';
 import dynamic from 'next/dynamic';
-import type { ReactNode } from 'react';
+import { useEffect, type ReactNode } from 'react';
 
 import { Button } from '@/components/ui/button';
 
+import { PageSpots, type PageSpotsProps } from './page-spots';
+import { WordsPage } from './words-page';
 import { usePaging, type Paging } from './use-paging';
 import { useElementWidth } from './use-width';
 
@@ -23,11 +25,24 @@ interface PageViewerProps {
   facts: ReactNode;
   /** Other files of the batch to look at: charts. */
   choice?: ReactNode;
+  /** What was read on it, where something was. */
+  read?: Read;
+}
+
+interface Read extends Omit<PageSpotsProps, 'page'> {
+  pages: readonly PageSpotsProps['page'][];
 }
 
 /** A received file, page by page, as large as the room it has. */
-export function PageViewer({ file, title, facts, choice }: PageViewerProps) {
+export function PageViewer({ file, title, facts, choice, read }: PageViewerProps) {
   const paging = usePaging();
+  useTurnToLit(paging, read);
+  const kept = read?.pages.find(({ number }) => number === paging.page);
+  useEffect(() => {
+    // A mail or a text has as many pages as its reader made of it.
+    if (!isDrawn(file) && read && read.pages.length > 0) paging.setPages(read.pages.length);
+    // eslint-disable-next-line react-hooks/exhaustive-deps -- the setter is the same at every draw
+  }, [file, read?.pages.length]);
   const { element, width } = useElementWidth<HTMLDivElement>();
   const url = `/api/files/${file.id}/content?inline=1`;
   const drawn = Math.max(200, Math.floor((width - 36) * paging.zoom));
@@ -46,35 +61,61 @@ export function PageViewer({ file, title, facts, choice }: PageViewerProps) {
         className="min-h-[320px] flex-1 overflow-auto max-lg:max-h-[60dvh]"
       >
         <div className="flex w-max min-w-full justify-center p-[18px]">
-          {width > 0 && file.mediaType === 'application/pdf' && (
-            <PdfPage
-              url={url}
-              page={paging.page}
-              width={drawn}
-              turned={paging.turned}
-              onPages={paging.setPages}
-            />
-          )}
-          {file.mediaType.startsWith('image/') && (
-            // A received picture is shown from where it is kept; no copy of another size would be the original.
-            // eslint-disable-next-line @next/next/no-img-element -- see above
-            <img
-              src={url}
-              alt={`The received picture ${file.name}`}
-              width={drawn}
-              style={{ width: drawn, transform: `rotate(${paging.turned}deg)` }}
-              className="h-auto max-w-none"
-            />
-          )}
-          {file.mediaType !== 'application/pdf' && !file.mediaType.startsWith('image/') && (
-            <p className="p-6">
-              This file cannot be shown here. <a href={`/api/files/${file.id}/content`}>Save it</a>
-            </p>
-          )}
+          <div className="relative">
+            {width > 0 && file.mediaType === 'application/pdf' && (
+              <PdfPage
+                url={url}
+                page={paging.page}
+                width={drawn}
+                upright={kept?.turned ?? null}
+                turned={paging.turned}
+                onPages={paging.setPages}
+              />
+            )}
+            {file.mediaType.startsWith('image/') && (
+              // A received picture is shown from where it is kept; no copy of another size would be the original.
+              // eslint-disable-next-line @next/next/no-img-element -- see above
+              <img
+                src={url}
+                alt={`The received picture ${file.name}`}
+                width={drawn}
+                style={{ width: drawn, transform: `rotate(${paging.turned + (kept?.turned ?? 0)}deg)` }}
+                className="h-auto max-w-none"
+              />
+            )}
+            {!isDrawn(file) &&
+              (kept ? (
+                <WordsPage page={kept} width={drawn} />
+              ) : (
+                <p className="p-6">
+                  This file cannot be shown here. <a href={`/api/files/${file.id}/content`}>Save it</a>
+                </p>
+              ))}
+            {read && kept && paging.turned === 0 && isDrawnUpright(file, kept) && (
+              <PageSpots {...read} page={kept} />
+            )}
+          </div>
         </div>
       </div>
     </section>
   );
+}
+
+const isDrawn = ({ mediaType }: ViewedFile): boolean =>
+  mediaType === 'application/pdf' || mediaType.startsWith('image/');
+
+/** A picture that was turned or straightened to be read has its words elsewhere than the picture shown. */
+const isDrawnUpright = (file: ViewedFile, page: PageSpotsProps['page']): boolean =>
+  !file.mediaType.startsWith('image/') || page.turned === 0;
+
+/** The page on which the selected row stands comes up when the row is selected. */
+function useTurnToLit({ page, toPage }: Paging, read: Read | undefined) {
+  const lit = read?.spots.find(({ row }) => row === read.selected)?.page;
+  useEffect(() => {
+    if (lit !== undefined && lit !== page) toPage(lit);
+    // Only when another row is selected: who turns the page by hand stays there.
+    // eslint-disable-next-line react-hooks/exhaustive-deps -- see above
+  }, [read?.selected, lit]);
 }
 
 function ViewerControls({ paging, choice }: { paging: Paging; choice: ReactNode }) {

@@ -1,4 +1,5 @@
 'use client';
+import { useState } from 'react';
 import { Document, Page, pdfjs } from 'react-pdf';
 
 import { Failing } from '@/components/ui/failing';
@@ -22,11 +23,15 @@ interface PdfPageProps {
   url: string;
   page: number;
   width: number;
+  /** Degrees by which the page stands upright, where a reader found out; its own turn otherwise. */
+  upright: number | null;
+  /** Degrees that the person turned it by. */
   turned: number;
   onPages: (pages: number) => void;
 }
 
-export function PdfPage({ url, page, width, turned, onPages }: PdfPageProps) {
+export function PdfPage({ url, page, width, upright, turned, onPages }: PdfPageProps) {
+  const [own, setOwn] = useState(0);
   const waiting = <p className="p-6 text-quiet">Reading the file</p>;
   const failing = (
     <div className="bg-paper px-4 py-2">
@@ -49,7 +54,8 @@ export function PdfPage({ url, page, width, turned, onPages }: PdfPageProps) {
       <Page
         pageNumber={page}
         width={width}
-        rotate={turned}
+        rotate={((upright ?? own) + turned) % 360}
+        onLoadSuccess={({ rotate }) => setOwn(rotate)}
         loading={waiting}
         error={failing}
         renderAnnotationLayer={false}

@@ -40,7 +40,7 @@ export function ProveFoot({ proving, onSign }: { proving: Proving; onSign: () =>
       </div>
       <div className="flex flex-wrap gap-x-3 gap-y-1 pt-2">
         <Kbd keys="J K" says="row" />
-        <Kbd keys="Enter" says="as ordered" />
+        <Kbd keys="Enter" says={proving.reading.data?.state === 'read' ? 'confirm as read' : 'as ordered'} />
         <Kbd keys="E" says="enter" />
         <Kbd keys="O" says="override" />
         <Kbd keys="H" says="hold" />

@@ -9,6 +9,7 @@ import { CertificateHead } from './certificate-head';
 import { CertificateWarnings } from './certificate-warnings';
 import { LineRows } from './line-row';
 import { ProveFoot } from './prove-foot';
+import { ReadingSummary } from './reading-summary';
 import { RequirementRows } from './requirement-row';
 import { SignStep } from './sign-step';
 import { Signatures } from './signatures';
@@ -16,9 +17,10 @@ import type { Proving } from './use-proving';
 
 const COLUMNS = [
   { says: 'Number of the row', hidden: true, className: 'w-7' },
-  { says: 'Must be proved', className: 'w-[25%]' },
-  { says: 'Ordered', className: 'w-[23%]' },
+  { says: 'Must be proved', className: 'w-[24%]' },
+  { says: 'Ordered', className: 'w-[21%]' },
   { says: 'As stated', className: 'w-[17%]' },
+  { says: 'How well', className: 'w-14 max-md:hidden' },
   { says: 'Verdict' },
   { says: 'You', right: true },
 ];
@@ -40,6 +42,7 @@ export function ProvePanel({ proving }: { proving: Proving }) {
           </span>
         </div>
         <CertificateWarnings proving={proving} />
+        <ReadingSummary proving={proving} />
         <CertificateHead proving={proving} />
         <Table label="What must be proved" columns={COLUMNS} dense>
           <Rows proving={proving} />

@@ -1,4 +1,5 @@
 'use client';
+import Link from 'next/link';
 import { useState } from 'react';
 
 import { Button } from '@/components/ui/button';
@@ -8,7 +9,9 @@ import { useClock } from '@/components/session/use-me';
 import { certificateName, shortHash } from './certificate-words';
 import { PageViewer } from './page-viewer';
 import { ProvePanel } from './prove-panel';
+import { Thread } from './thread';
 import { useProving, type Proving } from './use-proving';
+import { spotsOf } from './use-reading';
 
 /** The page left, what it must prove right. */
 export function ProveScreen({ certificateId }: { certificateId: string }) {
@@ -19,11 +22,13 @@ export function ProveScreen({ certificateId }: { certificateId: string }) {
         <Viewed proving={proving} />
       </div>
       <ProvePanel proving={proving} />
+      <Thread row={proving.selected} />
     </div>
   );
 }
 
-function Viewed({ proving: { data } }: { proving: Proving }) {
+function Viewed({ proving }: { proving: Proving }) {
+  const { data, reading, selected } = proving;
   const clock = useClock();
   const [chartId, setChartId] = useState<string | null>(null);
   const chart = data.charts.find((one) => one.id === chartId);
@@ -53,12 +58,38 @@ function Viewed({ proving: { data } }: { proving: Proving }) {
       )}
       {data.charts
         .filter((one) => one.id !== chartId)
-        .map((one) => (
-          <Button key={one.id} look="word" onClick={() => setChartId(one.id)}>
-            Chart {one.fileName}
-          </Button>
-        ))}
+        .map((one) =>
+          // A recorder's table is drawn on a page of its own; a chart on paper is looked at here.
+          isTable(one) ? (
+            <Link key={one.id} href={`/charts/${one.id}`} className="lw-word-button">
+              Chart {one.fileName}
+            </Link>
+          ) : (
+            <Button key={one.id} look="word" onClick={() => setChartId(one.id)}>
+              Chart {one.fileName}
+            </Button>
+          ),
+        )}
     </span>
   );
-  return <PageViewer key={shown.id} file={shown} title={title} facts={facts} choice={choice} />;
+  const read = {
+    pages: reading.data?.pages ?? [],
+    spots: spotsOf(reading.data, { ...data, selected }),
+    selected,
+    numberOf: (row: string) => proving.rows.indexOf(row) + 1,
+    onRow: proving.toRow,
+    onWords: proving.canEdit && selected !== null ? reading.choose : null,
+  };
+  return (
+    <PageViewer
+      key={shown.id}
+      file={shown}
+      title={title}
+      facts={facts}
+      choice={choice}
+      {...(!chart && { read })}
+    />
+  );
 }
+
+const isTable = ({ mediaType }: { mediaType: string }): boolean => mediaType.startsWith('text/');

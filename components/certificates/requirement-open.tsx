@@ -12,6 +12,7 @@ import { limitWords } from '@/lib/parts/limit-words';
 import { linesOf, undecidedAlike } from './alike';
 import { AskForm } from './ask-form';
 import { OverrideDialog } from './override-dialog';
+import { SpotPicture } from './spot-picture';
 import type { Proving } from './use-proving';
 
 interface RequirementOpenProps {
@@ -33,7 +34,7 @@ export function RequirementOpen({ requirement, proving, canEdit }: RequirementOp
   const processor = batch.processor.split(' ')[0] ?? batch.processor;
   return (
     <tr role="row">
-      <td role="cell" colSpan={6} className="border-b-heavy border-ink bg-bench">
+      <td role="cell" colSpan={7} className="border-b-heavy border-ink bg-bench">
         <div className="flex flex-col gap-2.5 py-2 pl-9 max-md:pl-0">
           <p className="text-second">
             <SourceWords requirement={requirement} />
@@ -44,7 +45,8 @@ export function RequirementOpen({ requirement, proving, canEdit }: RequirementOp
               </span>
             )}
           </p>
-          {canEdit && <Judge requirement={requirement} proving={proving} />}
+          {!decision && <WhatWasRead requirementId={requirement.id} proving={proving} />}
+          {canEdit && <Judge key={proving.reading.chosen} requirement={requirement} proving={proving} />}
           {doing === null && (
             <div className="flex flex-wrap gap-2">
               {canEdit && decision && decision.verdict !== 'meets' && (
@@ -100,9 +102,29 @@ function SourceWords({ requirement }: { requirement: ProvedRequirement }) {
   );
 }
 
+/** Why it is proposed, with the spot itself as large as it can be read. */
+function WhatWasRead({ requirementId, proving }: { requirementId: string; proving: Proving }) {
+  const { data, proposalOf } = proving.reading;
+  const proposal = proposalOf(requirementId);
+  if (!data || !proposal) return null;
+  const fact = data.facts[proposal.facts[0] ?? -1];
+  const page = data.pages.find(({ number }) => number === fact?.page);
+  return (
+    <div className="flex flex-wrap items-center gap-4">
+      {fact && page && <SpotPicture fact={fact} page={page} />}
+      <p className="min-w-48 flex-1 text-second">
+        <strong>{proposal.stated || 'Nothing is stated.'}</strong> {proposal.why}
+      </p>
+    </div>
+  );
+}
+
 function Judge({ requirement, proving }: Omit<RequirementOpenProps, 'canEdit'>) {
   const { decision } = requirement;
-  const [stated, setStated] = useState(decision?.stated ?? '');
+  const { chosen, proposalOf } = proving.reading;
+  const [stated, setStated] = useState(
+    chosen || (decision?.stated ?? proposalOf(requirement.id)?.stated ?? ''),
+  );
   const alike = undecidedAlike(requirement, proving.data.requirements);
   const meetsOnAll = async () => {
     const all = [requirement, ...alike];

@@ -2,12 +2,14 @@
 import type { KeyboardEvent } from 'react';
 
 import { Cell, Row } from '@/components/ui/table';
+import { HowWell } from '@/components/ui/how-well';
 import { VerdictWord } from '@/components/ui/verdict';
 import type { ProvedRequirement } from '@/lib/certificates/contract';
 import { limitWords } from '@/lib/parts/limit-words';
 
 import { RequirementOpen } from './requirement-open';
 import { RowNumber } from './row-number';
+import { qualityOfProposal } from './use-reading';
 import type { Proving } from './use-proving';
 
 /** What Enter writes where the page says just what was ordered. */
@@ -29,16 +31,23 @@ function RequirementRow({ requirement, proving }: { requirement: ProvedRequireme
   const { id, characteristic, decision } = requirement;
   const selected = proving.selected === id;
   const canEdit = proving.canEdit && !decision?.sealed;
+  const proposal = decision ? undefined : proving.reading.proposalOf(id);
+  const quality = proposal ? qualityOfProposal(proposal) : null;
   const confirm = async () => {
-    const stated = decision?.stated ? decision.stated : AS_ORDERED;
     proving.onward(id);
-    await proving.decide(requirement, { verdict: 'meets', stated });
+    await proving.decide(requirement, {
+      verdict: proposal?.verdict ?? 'meets',
+      stated: (proposal?.stated ?? decision?.stated) || (proposal ? '' : AS_ORDERED),
+    });
   };
   return (
     <>
       <Row selected={selected}>
         <Cell className="w-7">
-          <RowNumber number={proving.rows.indexOf(id) + 1} verdict={decision?.verdict ?? 'to_decide'} />
+          <RowNumber
+            number={proving.rows.indexOf(id) + 1}
+            verdict={decision?.verdict ?? proposal?.verdict ?? 'to_decide'}
+          />
         </Cell>
         <Cell>
           <RowButton
@@ -53,18 +62,19 @@ function RequirementRow({ requirement, proving }: { requirement: ProvedRequireme
           {limitWords(requirement)}
         </Cell>
         <Cell code strong head="As stated" className="text-[0.78rem] [overflow-wrap:anywhere]">
-          {decision?.stated}
+          {decision?.stated ?? <span className="font-normal">{proposal?.stated}</span>}
         </Cell>
+        <Cell className="max-md:hidden">{quality && <HowWell quality={quality} />}</Cell>
         <Cell>
           <VerdictWord
-            verdict={decision?.verdict ?? 'to_decide'}
+            verdict={decision?.verdict ?? proposal?.verdict ?? 'to_decide'}
             {...(decision?.overrideReason
               ? { overruled: { to: 'meets' as const, reason: decision.overrideReason } }
               : {})}
           />
         </Cell>
         <Cell right>
-          <YourPart requirement={requirement} />
+          <YourPart requirement={requirement} isProposed={proposal !== undefined} />
         </Cell>
       </Row>
       {selected && <RequirementOpen key={id} requirement={requirement} proving={proving} canEdit={canEdit} />}
@@ -72,8 +82,14 @@ function RequirementRow({ requirement, proving }: { requirement: ProvedRequireme
   );
 }
 
-function YourPart({ requirement: { decision } }: { requirement: ProvedRequirement }) {
-  if (!decision) return null;
+function YourPart({
+  requirement: { decision },
+  isProposed,
+}: {
+  requirement: ProvedRequirement;
+  isProposed: boolean;
+}) {
+  if (!decision) return isProposed && <strong className="whitespace-nowrap">to confirm</strong>;
   if (decision.sealed) return <span className="text-quiet">signed</span>;
   return <span className="text-quiet">{decision.overrideReason ? 'overridden' : 'decided'}</span>;
 }

@@ -13,6 +13,7 @@ export function usePiecesEntered(certificateId: string, lines: readonly ProvedLi
   return {
     pieces,
     setPieces: (lineId: string, count: number | null) => keep({ ...pieces, [lineId]: count }),
+    setAllPieces: (more: Record<string, number>) => keep({ ...pieces, ...more }),
     forgetPieces: () => keep(null),
   };
 }

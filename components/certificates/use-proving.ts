@@ -16,8 +16,9 @@ import type { Verdict } from '@/lib/certificates/verdict';
 
 import { rowsOf } from './certificate-words';
 import { usePiecesEntered } from './use-pieces-entered';
+import { useReading } from './use-reading';
 
-interface Reading {
+interface Judgement {
   stated?: string;
   verdict: Verdict;
   overrideReason?: string | null;
@@ -30,6 +31,7 @@ export function useProving(certificateId: string) {
   const mayProve = useMay('certificate.prove');
   const [selected, setSelected] = useState<string | null>(null);
   const entering = usePiecesEntered(certificateId, data.lines);
+  const reading = useReading(certificateId);
   const { pieces } = entering;
   const writeAll = useWrite(decideRequirements, { refreshes: [getCertificate, listCertificates] });
   const write = useWrite(decideRequirement, { refreshes: [getCertificate, listCertificates] });
@@ -48,6 +50,7 @@ export function useProving(certificateId: string) {
   const toRow = (rowId: string | undefined) => {
     if (rowId === undefined) return;
     setSelected(rowId);
+    reading.choose('');
     focusRow(rowId);
   };
   /** On to the next row that is still to decide; where none is left, to the next row. */
@@ -58,7 +61,7 @@ export function useProving(certificateId: string) {
 
   const decide = async (
     requirement: ProvedRequirement,
-    { stated, verdict, overrideReason = null, note }: Reading,
+    { stated, verdict, overrideReason = null, note }: Judgement,
   ) => {
     const { decision } = requirement;
     const input = {
@@ -77,10 +80,12 @@ export function useProving(certificateId: string) {
   const decideAll = async (
     requirements: readonly ProvedRequirement[],
     { stated, verdict }: { stated: string; verdict: Verdict },
+    statedOf?: (requirement: ProvedRequirement) => string,
   ) => {
-    const versions = requirements.map(({ id, decision }) => ({
-      requirementId: id,
-      version: decision?.version ?? null,
+    const versions = requirements.map((requirement) => ({
+      requirementId: requirement.id,
+      version: requirement.decision?.version ?? null,
+      ...(statedOf && { stated: statedOf(requirement) }),
     }));
     await writeAll.mutateAsync({ certificateId, requirements: versions, stated, verdict }).catch(tellFailure);
   };
@@ -90,12 +95,16 @@ export function useProving(certificateId: string) {
     canEdit: mayProve && data.certificate.setAsideAt === null && data.file.verified,
     mayProve,
     selected,
-    select: setSelected,
+    select: (rowId: string) => {
+      if (rowId !== selected) reading.choose('');
+      setSelected(rowId);
+    },
     toRow,
     onward,
     decide,
     decideAll,
     ...entering,
+    reading,
     coverage: coverage.filter((line) => line.pieces > 0),
     readiness,
     rows,

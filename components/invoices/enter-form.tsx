@@ -9,6 +9,7 @@ import { DateField, NumberInput, SelectField, TextField } from '@/components/ui/
 import { enterInvoice, type InvoiceDetail } from '@/lib/invoices/contract';
 import { amountText, CURRENCIES, parseAmount } from '@/lib/money';
 
+import { AsRead } from './as-read';
 import { EnterLine } from './enter-line';
 import { emptyLine, EnterValues, linesOf, startingValues, type EnterIn, type EnterOut } from './enter-values';
 import { useInvoiceWrite } from './use-invoice-write';
@@ -34,6 +35,7 @@ export function EnterForm({ invoice }: { invoice: InvoiceDetail }) {
   });
   return (
     <FormProvider {...form}>
+      {invoice.file && <AsRead invoiceId={invoice.id} />}
       <form noValidate onSubmit={enter} aria-label="What the invoice says">
         <div className="grid grid-cols-2 items-start gap-x-3 gap-y-3 border-t-heavy border-ink pt-3 sm:grid-cols-3">
           <TextField

@@ -1,7 +1,7 @@
 'use client';
 
 import { useMemo, useState } from 'react';
-import { useFormContext } from 'react-hook-form';
+import { useFormContext, useWatch } from 'react-hook-form';
 import { Button } from '@/components/ui/button';
 import { TextField } from '@/components/ui/field';
 import { sourceWords } from '@/lib/batches/source-words';
@@ -22,7 +22,8 @@ const HOW: Record<ChecklistItem['kind'], string> = {
 
 /** What the specification asks the order to state, as fields; what is missing is named even while they are folded. */
 export function OrderingEditor({ at }: { at: number }) {
-  const { register, formState } = useFormContext<PartValues>();
+  const { register, formState, control } = useFormContext<PartValues>();
+  const endCondition = useWatch({ control, name: 'endCondition' });
   const [open, setOpen] = useState(false);
   const step = useTypedRoute()[at];
   const form = useMemo(
@@ -35,9 +36,11 @@ export function OrderingEditor({ at }: { at: number }) {
             conditionBefore: step.conditionBefore ?? '',
             targetCondition: step.targetCondition ?? '',
             ordering: step.ordering ?? {},
+            characteristics: (step.toProve ?? []).map(({ characteristic }) => characteristic),
+            endCondition,
           })
         : null,
-    [step],
+    [step, endCondition],
   );
   if (!form || form.asked.length === 0) return null;
   const missing = form.missing.map(({ item }) => ORDER_ITEM_WORDS[item]);

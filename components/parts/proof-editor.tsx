@@ -5,6 +5,7 @@ import { Button } from '@/components/ui/button';
 import { SelectField, TextField } from '@/components/ui/field';
 import { REQUIREMENT_SOURCES } from '@/lib/parts/to-prove';
 import { EMPTY_PROOF, type PartValues } from './part-form-values';
+import { ProposeProofs } from './propose-proofs';
 
 const SOURCE_OPTIONS = REQUIREMENT_SOURCES.map((value) => ({ value, says: value }));
 
@@ -79,7 +80,7 @@ export function ProofEditor({ step }: { step: number }) {
           </div>
         );
       })}
-      <div className="pt-2">
+      <div className="flex flex-wrap gap-x-4 pt-2">
         <Button
           look="word"
           aria-label={`Add what step ${step + 1} must prove`}
@@ -87,6 +88,7 @@ export function ProofEditor({ step }: { step: number }) {
         >
           Add what must be proved
         </Button>
+        <ProposeProofs step={step} append={append} />
       </div>
     </div>
   );

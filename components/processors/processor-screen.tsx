@@ -13,6 +13,7 @@ import { getProcessor, inviteProcessor, type Processor } from '@/lib/processors/
 
 import { Approvals } from './approvals';
 import { ContactForm } from './contact-form';
+import { EquipmentSection } from './equipment-section';
 import { ProcessorBatches } from './processor-batches';
 
 export function ProcessorScreen({ processorId, now }: { processorId: string; now: Date }) {
@@ -29,6 +30,7 @@ export function ProcessorScreen({ processorId, now }: { processorId: string; now
         main={
           <>
             <Approvals processor={processor} mayEdit={mayEdit} now={now} />
+            <EquipmentSection processorId={processorId} mayEdit={mayEdit} />
             <ProcessorBatches processorId={processorId} now={now} />
             <History entity="processor" id={processorId} />
           </>

@@ -7,7 +7,7 @@ import { SOAK_TIMES } from '@/lib/trade/tables/soak-times';
 import { SOLUTION_TEMPERATURES } from '@/lib/trade/tables/solution-temperatures';
 
 import { Answer, NoAnswer } from './answer';
-import { apartWords, unplacedWords } from './load-words';
+import { apartWords, unplacedWords } from '@/lib/reference/load-words';
 import { SourceLine } from './source-line';
 import type { Bench } from './use-bench';
 

@@ -1,4 +1,4 @@
-export type ReadQuality = 1 | 2 | 3;
+import type { ReadQuality } from '@/lib/readings/quality';
 
 const WORDS: Record<ReadQuality, string> = { 1: 'read poorly', 2: 'read fairly', 3: 'read well' };
 const BARS = [

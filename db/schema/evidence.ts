@@ -49,7 +49,7 @@ export const certificates = pgTable(
   ],
 );
 
-/** A furnace or bath recorder file. Reading it comes with its own issue; here it is kept and shown. */
+/** A furnace or bath recorder file. What was read in it lies in its reading. */
 export const charts = pgTable(
   'charts',
   {
@@ -117,6 +117,8 @@ export const signatures = pgTable(
     signedBy: uuid('signed_by').notNull(),
     signerName: text('signer_name').notNull(),
     signedAt: moment('signed_at').notNull(),
+    /** How long the paper lay open before the person until it was signed, where the screen could tell. */
+    reviewSeconds: integer('review_seconds'),
   },
   (t) => [
     unique('signatures_shop').on(t.shopId, t.id),

@@ -10,10 +10,13 @@ import { PROCESS_WORDS } from '@/lib/trade/process';
 import { keepFile } from './keep-file';
 import { dayOf, type DemoProcessor } from './organisations';
 import { makeForm } from './papers';
+import { statedOn } from './stated-on';
 
 interface Paper {
   name: string;
   content: Buffer;
+  /** A PDF where it is not said. */
+  mediaType?: string;
 }
 
 /** What a processor reads off the order when it writes its papers. */
@@ -56,7 +59,13 @@ async function readOrder(ctx: Ctx, batchId: string) {
 export async function certificateOf(
   ctx: Ctx,
   batchId: string,
-  given: { processor: DemoProcessor; uncovered: number; missing: number },
+  given: {
+    processor: DemoProcessor;
+    uncovered: number;
+    missing: number;
+    /** What it states otherwise than a good paper would, by characteristic. */
+    stated: Readonly<Record<string, string>>;
+  },
 ): Promise<Paper> {
   const batch = await readOrder(ctx, batchId);
   const number = certificateNumber(batch.number, ctx.now);
@@ -65,14 +74,14 @@ export async function certificateOf(
     title: 'Certificate of conformance',
     from: { name: given.processor.name, address: 'Works Road, Tamarack Junction' },
     facts: [
-      ['Certificate', number],
+      ['Certificate no.', number],
       ['Date', dayOf(ctx.now)],
       ['Purchase order', batch.orderNumber],
       ['Customer', batch.shop],
       ['Traveller', batch.number],
       ['Process', PROCESS_WORDS[batch.process]],
       ['Specification', [batch.specification, batch.specificationRevision].filter(Boolean).join(' rev ')],
-      ['Class, type', batch.classType ?? ''],
+      ['Class / type', batch.classType ?? ''],
     ],
     columns: ['Part number', 'Rev', 'Description', 'Lot', 'Quantity'],
     lines: batch.lines.map((line, at) => ({
@@ -85,11 +94,7 @@ export async function certificateOf(
       ],
     })),
     statements: [
-      ...new Set(
-        batch.requirements.map(
-          (one) => `${one.characteristic}: as ordered (${[one.limit, one.unit].filter(Boolean).join(' ')})`,
-        ),
-      ),
+      ...new Set(batch.requirements.flatMap((one) => statedOn(one, given.stated) ?? [])),
       'We certify that the parts listed above were processed and inspected to the order and the specification named, and that the results are on file.',
     ],
     signed: { name: given.processor.contact, role: 'Quality', day: dayOf(ctx.now) },
@@ -194,6 +199,11 @@ export async function keepPaper(
     .where(eq(batches.id, batchId));
   if (!batch) throw new Error('a batch of the story is gone');
   return inOwningShop(ctx, batch.shopId, (inner) =>
-    keepFile(inner, { ...paper, mediaType: 'application/pdf', batchId, processorId: batch.processorId }),
+    keepFile(inner, {
+      ...paper,
+      mediaType: paper.mediaType ?? 'application/pdf',
+      batchId,
+      processorId: batch.processorId,
+    }),
   );
 }

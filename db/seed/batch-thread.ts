@@ -19,6 +19,7 @@ import { releasePieces } from '@/lib/stock/release-pieces';
 import { getGate } from '@/lib/stock/queries';
 
 import { certificateOf, invoiceOf, keepPaper } from './batch-papers';
+import { recordOfSolution } from './furnace-record';
 import { proveCertificate } from './prove';
 import { payThrough } from './pay';
 import { addDays, dayOf, type DemoPerson, type DemoProcessor } from './organisations';
@@ -55,6 +56,10 @@ export interface BatchPlot {
   papersAfter?: number;
   /** Pieces of the last line that the certificate does not cover. */
   uncovered?: number;
+  /** What the certificate states otherwise than it ought to, by characteristic. */
+  states?: Readonly<Record<string, string>>;
+  /** Minutes at temperature on the chart that comes with the certificate; without it no chart comes. */
+  soakedMin?: number;
   provedAfter?: number;
   held?: { after: number; pieces: number; what: string };
   invoicedAfter?: number;
@@ -131,10 +136,24 @@ export async function* batchThread(
       processor: plot.processor,
       uncovered: plot.uncovered ?? 0,
       missing: plot.missing ?? 0,
+      stated: plot.states ?? {},
     });
     const fileId = await keepPaper(ctx, batchId, { ...paper, purpose: 'certificate' });
     return (await sendPaper(ctx, { batchId, kind: 'certificate', fileId })).id;
   });
+  if (plot.soakedMin !== undefined) {
+    const { soakedMin } = plot;
+    yield at(plot.papersAfter, 15);
+    await play.asProcessor(plot.processor, at(plot.papersAfter, 15), async (ctx) => {
+      const fileId = await keepPaper(ctx, batchId, {
+        name: 'furnace-2-load-a.csv',
+        content: recordOfSolution({ endedAt: at(plot.papersAfter ?? 0, 9), soakedMin }),
+        mediaType: 'text/csv',
+        purpose: 'chart',
+      });
+      await sendPaper(ctx, { batchId, kind: 'chart', fileId });
+    });
+  }
   if (plot.held) {
     yield at(plot.held.after, 10);
     const { held } = plot;

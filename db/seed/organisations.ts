@@ -1,12 +1,16 @@
 import { hash } from '@node-rs/argon2';
 import type { drizzle } from 'drizzle-orm/node-postgres';
 
+import { equipment } from '@/db/schema/equipment';
 import { processors, shopProcessors, shops, approvals } from '@/db/schema/organisations';
 import { memberships, users } from '@/db/schema/people';
 import type { Role } from '@/lib/auth/roles';
+import type { EquipmentFields } from '@/lib/equipment/contract';
+import { equipmentColumns } from '@/lib/equipment/equipment-columns';
 import { newId } from '@/lib/ids';
 import type { Process } from '@/lib/trade/process';
 
+import { INSPECTION_ROOMS, PLATING_ROOMS, THERMAL_ROOMS } from './rooms';
 import { DEMO_PASSWORD } from './sign-ins';
 
 type OwnerDb = ReturnType<typeof drizzle>;
@@ -128,12 +132,14 @@ export async function seedOrganisations(
     contact,
     processes,
     validDays,
+    rooms = [],
   }: {
     name: string;
     domain: string;
     contact: string;
     processes: readonly Process[];
     validDays: number;
+    rooms?: readonly EquipmentFields[];
   }): Promise<DemoProcessor> => {
     const id = newId();
     const email = `desk@${domain}`;
@@ -167,6 +173,14 @@ export async function seedOrganisations(
         validTo: dayOf(addDays(today, validDays)),
         createdAt: since,
       });
+      for (const room of rooms)
+        await owner.insert(equipment).values({
+          id: newId(),
+          shopId: shop,
+          processorId: id,
+          ...equipmentColumns(room),
+          createdAt: since,
+        });
     }
     return { id, name, contact, personId: desk.id, processes };
   };
@@ -183,6 +197,7 @@ export async function seedOrganisations(
         contact: 'Runa Holt',
         processes: HEAT,
         validDays: 21,
+        rooms: THERMAL_ROOMS,
       }),
       plating: await processor({
         name: 'Sallow & Finch Plating',
@@ -190,6 +205,7 @@ export async function seedOrganisations(
         contact: 'Imre Vasko',
         processes: FINISH,
         validDays: 240,
+        rooms: PLATING_ROOMS,
       }),
       inspection: await processor({
         name: 'Dunlin Inspection',
@@ -197,6 +213,7 @@ export async function seedOrganisations(
         contact: 'Thea Marsh',
         processes: NDT,
         validDays: 320,
+        rooms: INSPECTION_ROOMS,
       }),
       peening: await processor({
         name: 'Cobble Street Peening and Surface Works',

@@ -1,4 +1,4 @@
-import { Document, Page, StyleSheet, Text, View } from '@react-pdf/renderer';
+import { Document, Page, Path, StyleSheet, Svg, Text, View } from '@react-pdf/renderer';
 
 import { renderPdf } from '@/lib/pdf/render-pdf';
 
@@ -21,7 +21,7 @@ interface Form {
 const style = StyleSheet.create({
   page: { padding: 48, fontSize: 9.5, lineHeight: 1.35 },
   title: { fontFamily: 'Barlow Semi Condensed', fontWeight: 600, fontSize: 16, textAlign: 'right' },
-  house: { fontFamily: 'Barlow', fontWeight: 600, fontSize: 15 },
+  house: { fontFamily: 'Barlow', fontWeight: 600, fontSize: 15, lineHeight: 1.5 },
   fact: { flexDirection: 'row', width: '50%', paddingVertical: 2 },
   cell: { flexGrow: 1, flexBasis: 0, padding: 3 },
 });
@@ -71,15 +71,33 @@ export function makeForm(form: Form): Promise<Buffer> {
           </Text>
         ))}
         {form.signed && (
-          <View style={{ marginTop: 46, width: 220, borderTop: '1 solid #000', paddingTop: 3 }}>
-            <Text>{form.signed.name}</Text>
-            <Text style={{ color: '#555' }}>
-              {form.signed.role}, {form.signed.day}
-            </Text>
+          <View style={{ marginTop: 14, width: 220 }}>
+            <Hand name={form.signed.name} />
+            <View style={{ borderTop: '1 solid #000', paddingTop: 3 }}>
+              <Text style={{ color: '#555' }}>Signature</Text>
+              <Text>{form.signed.name}</Text>
+              <Text style={{ color: '#555' }}>
+                {form.signed.role}, {form.signed.day}
+              </Text>
+            </View>
           </View>
         )}
       </Page>
     </Document>,
+  );
+}
+
+/** A name as a pen draws it: one loop for each letter, the same for the same name. */
+function Hand({ name }: { name: string }) {
+  const loops = Array.from(name.replace(/\W/g, ''), (letter, at) => {
+    const high = 6 + (letter.charCodeAt(0) % 7) * 2.4;
+    const x = 12 + at * 11;
+    return `C${x} ${34 - high} ${x + 9} ${30 - high} ${x + 7} 30S${x + 3} 38 ${x + 11} 29`;
+  }).join('');
+  return (
+    <Svg width={190} height={44} viewBox="0 0 190 44">
+      <Path d={`M4 31${loops}`} stroke="#1d2f6f" strokeWidth={1.1} fill="none" />
+    </Svg>
   );
 }
 

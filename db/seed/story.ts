@@ -57,6 +57,7 @@ const PRESENT: readonly Campaign[] = [
         shippedAfter: 8,
         receivedAfter: 9,
         papersAfter: 9,
+        states: { 'Bake start': '6.2 h after plating' },
         held: { after: 10, pieces: 16, what: 'Bake began 6 h 10 min after plating; the order says 4 h' },
       }),
     ],
@@ -70,7 +71,9 @@ const PRESENT: readonly Campaign[] = [
       ['MC-1102-03', 4],
       ['MC-1102-04', 4],
     ],
-    steps: [plot({ ...out, promises: [12], shippedAfter: 11, receivedAfter: 13, papersAfter: 13 })],
+    steps: [
+      plot({ ...out, promises: [12], shippedAfter: 11, receivedAfter: 13, papersAfter: 13, soakedMin: 38 }),
+    ],
   },
   // A certificate for 40 of 41 pieces, signed for 40.
   {

@@ -2,7 +2,9 @@ import * as assemblies from '@/lib/assemblies/endpoints';
 import * as audit from '@/lib/audit/endpoints';
 import * as batches from '@/lib/batches/endpoints';
 import * as certificates from '@/lib/certificates/endpoints';
+import * as charts from '@/lib/charts/endpoints';
 import * as dossiers from '@/lib/dossiers/endpoints';
+import * as equipment from '@/lib/equipment/endpoints';
 import * as files from '@/lib/files/endpoints';
 import * as invoices from '@/lib/invoices/endpoints';
 import * as jobs from '@/lib/jobs/endpoints';
@@ -16,7 +18,9 @@ import * as people from '@/lib/people/endpoints';
 import * as portal from '@/lib/portal/endpoints';
 import * as batchLinks from '@/lib/portal/link-endpoints';
 import * as processors from '@/lib/processors/endpoints';
+import * as readings from '@/lib/readings/endpoints';
 import * as receipts from '@/lib/receipts/endpoints';
+import * as requirements from '@/lib/requirements/endpoints';
 import * as search from '@/lib/search/endpoints';
 import * as session from '@/lib/session/endpoints';
 import * as stock from '@/lib/stock/endpoints';
@@ -31,7 +35,9 @@ export const ALL_ENDPOINTS: readonly Endpoint[] = [
   batchLinks,
   batches,
   certificates,
+  charts,
   dossiers,
+  equipment,
   files,
   invoices,
   jobs,
@@ -44,7 +50,9 @@ export const ALL_ENDPOINTS: readonly Endpoint[] = [
   people,
   portal,
   processors,
+  readings,
   receipts,
+  requirements,
   search,
   session,
   stock,

@@ -13,7 +13,9 @@ const Finding = z.object({
   sentence: z.string(),
   rest: z.string(),
   source: z.string().optional(),
-  waysOut: z.array(z.object({ way: z.enum(WAYS_OUT), says: z.string(), lineId: Id.optional() })),
+  waysOut: z.array(
+    z.object({ way: z.enum(WAYS_OUT), says: z.string(), lineId: Id.optional(), partId: Id.optional() }),
+  ),
   /** Who let it pass, and why; null where nobody did. */
   passed: z.object({ overrideId: Id, reason: z.string(), by: z.string(), at: Moment }).nullable(),
 });

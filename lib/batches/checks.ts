@@ -1,8 +1,11 @@
 import type { Check, CheckFacts } from './check';
 import { hasReheatsLeft } from './clad-checks';
 import { canBeMade } from './condition-checks';
+import { isHotEnough } from './furnace-checks';
+import { fitsIn } from './envelope-checks';
 import { CHECK_LEVELS, type Finding } from './finding';
 import { hasLines, isCurrent, isOneStep, isProvable } from './line-checks';
+import { statesWhatIsAsked } from './ordering-checks';
 import { hasDay, hasPrice, isTakenUp } from './order-checks';
 import { sharesLoads } from './load-checks';
 import { isApproved, isApprovedUntilBack, worksForUs } from './processor-checks';
@@ -19,9 +22,12 @@ const CHECKS: readonly Check[] = [
   hasReheatsLeft,
   standsInOrder,
   sharesLoads,
+  fitsIn,
+  isHotEnough,
   isApprovedUntilBack,
   isInForce,
   meansWhatItSays,
+  statesWhatIsAsked,
   isProvable,
   isCurrent,
   hasDay,

@@ -34,6 +34,9 @@ export const BatchRef = z.object({ id: Id, number: z.string(), version: z.int() 
 /** The version of the batch that the person saw; an older one is refused, so that nobody's change is lost. */
 export const Seen = z.object({ batchId: Id, version: z.int().min(1) });
 
+/** More loads than that are no batch for one order. */
+export const MOST_LOADS = 99;
+
 export const Price = z
   .int('Enter an amount.')
   .min(0, 'Enter 0 or more.')
@@ -128,6 +131,9 @@ export const getBatch = declare({
   response: Batch,
 });
 
+/** Of one piece, in g and mm². */
+export const Computed = z.object({ massG: z.number(), areaMm2: z.number() });
+
 export const BatchLine = z.object({
   id: Id,
   lineNo: z.int(),
@@ -152,6 +158,8 @@ export const BatchLine = z.object({
   /** Of one piece, in g and mm²; null where the part does not say. */
   massG: z.number().nullable(),
   areaMm2: z.number().nullable(),
+  /** The most that one piece can have by its sizes, stock form and density; null where they say no plain shape. */
+  computed: Computed.nullable(),
 });
 export type BatchLine = z.output<typeof BatchLine>;
 
@@ -183,6 +191,9 @@ export const createBatch = declare({
 });
 export type CreateBatchInput = z.output<(typeof createBatch)['input']>;
 
+/** Furnace or tank load, counted from 1. */
+export const LoadNo = z.int().min(1).max(MOST_LOADS);
+
 export const addLine = declare({
   id: 'addBatchLine',
   method: 'post',
@@ -205,7 +216,7 @@ export const changeLine = declare({
     lineId: Id,
     pieces: Pieces.optional(),
     unitPriceMinor: Price.optional(),
-    loadNo: z.int().min(1).max(9).nullable().optional(),
+    loadNo: LoadNo.nullable().optional(),
   }),
   response: BatchRef,
 });

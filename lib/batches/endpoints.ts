@@ -8,13 +8,16 @@ import * as contract from './contract';
 import { createBatch } from './create-batch';
 import { dispatchBatch } from './dispatch-batch';
 import { getBatchLines } from './get-batch-lines';
+import { getLoadPlan } from './get-load-plan';
 import { listStepProcessors, listWaitingLots, listWaitingSteps } from './list-waiting';
 import { overrideCheck } from './override-check';
+import * as loading from './load-contract';
 import * as papers from './paper-contract';
 import { putBatchAside } from './put-batch-aside';
 import * as queries from './queries';
 import { reissueBatch } from './reissue-batch';
 import { removeLine } from './remove-line';
+import { setLoads } from './set-loads';
 import { setRequirements } from './set-requirements';
 import { updateBatch } from './update-batch';
 import * as waiting from './waiting-contract';
@@ -32,6 +35,9 @@ export const updateBatchEndpoint = endpoint(contract.updateBatch, updateBatch);
 export const setRequirementsEndpoint = endpoint(contract.setRequirements, setRequirements);
 export const putBatchAsideEndpoint = endpoint(contract.putBatchAside, putBatchAside);
 export const dispatchBatchEndpoint = endpoint(contract.dispatchBatch, dispatchBatch);
+
+export const getLoadPlanEndpoint = endpoint(loading.getLoadPlan, getLoadPlan);
+export const setLoadsEndpoint = endpoint(loading.setLoads, setLoads);
 
 export const getBatchChecksEndpoint = endpoint(checking.getBatchChecks, queries.getBatchChecks);
 export const overrideCheckEndpoint = endpoint(checking.overrideCheck, overrideCheck);

@@ -11,6 +11,7 @@ export const WAYS_OUT = [
   'set_prices',
   'set_requirements',
   'set_loads',
+  'state_order',
   'choose_processor',
   'see_processor',
   'take_up',
@@ -19,6 +20,7 @@ export interface WayOut {
   way: (typeof WAYS_OUT)[number];
   says: string;
   lineId?: string;
+  partId?: string;
 }
 
 export interface Finding {

@@ -5,6 +5,8 @@ import { balances } from '@/db/schema/lots';
 import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
 import { notFound } from '@/lib/errors';
+import { computedMassOf, computedSize } from '@/lib/parts/computed-mass';
+import { tablesOf } from '@/lib/reference/tables-of';
 
 import { readLinesAsTheyAre } from './freeze-lines';
 
@@ -54,6 +56,7 @@ export async function getBatchLines(ctx: Ctx, { batchId }: { batchId: string }) 
       loadNo: line.loadNo,
       massG: part.massG,
       areaMm2: part.areaMm2,
+      computed: computedSize(computedMassOf(tablesOf(ctx), part)),
     })),
   };
 }

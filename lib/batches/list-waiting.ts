@@ -9,6 +9,8 @@ import { toPage } from '@/lib/api/paging';
 import { authorize } from '@/lib/auth/authorize';
 import { shopOf, type Ctx } from '@/lib/auth/context';
 import { calendarDay, dayWords, type Clock } from '@/lib/day-words';
+import { computedMassOf, computedSize } from '@/lib/parts/computed-mass';
+import { tablesOf } from '@/lib/reference/tables-of';
 
 import { approvalStanding, type Approval, type ApprovalStanding } from './approval';
 import { materialWords } from './material-words';
@@ -80,6 +82,11 @@ export async function listWaitingLots(
       pieces: sql<number>`${balances.pieces}::int`,
       serialised: lots.serialised,
       massG: parts.massG,
+      endCondition: parts.endCondition,
+      lengthMm: parts.lengthMm,
+      widthMm: parts.widthMm,
+      heightMm: parts.heightMm,
+      thicknessMm: parts.thicknessMm,
       madeOn: lots.madeOn,
     })
     .from(balances)
@@ -106,10 +113,11 @@ export async function listWaitingLots(
   const page = toPage(rows, limit, (row) => row.lotId);
   return {
     ...page,
-    rows: page.rows.map(({ alloy, clad, form, supersededAt, ...row }) => ({
+    rows: page.rows.map((row) => ({
       ...row,
-      material: materialWords({ alloy, clad, form }),
-      partSuperseded: supersededAt !== null,
+      computed: computedSize(computedMassOf(tablesOf(ctx), row)),
+      material: materialWords(row),
+      partSuperseded: row.supersededAt !== null,
     })),
   };
 }

@@ -1,6 +1,7 @@
 import { temperOf } from '@/lib/parts/material-of';
 import type { BatchTables } from '@/lib/reference/batch-tables';
 import type { LoadGroup, LoadProcess } from '@/lib/trade/heat-treat/load-needs';
+import { requiredSoak } from '@/lib/trade/heat-treat/required-soak';
 import { planLoads, type KeptApart, type LoadPlan, type PlannedLoad } from '@/lib/trade/heat-treat/load-plan';
 import type { Process } from '@/lib/trade/process';
 import { celsiusDifferenceFromFahrenheit } from '@/lib/trade/units/temperature';
@@ -19,7 +20,18 @@ export interface LoadOfLines<Line> extends PlannedLoad {
   readonly lines: readonly Line[];
   /** The thickest part: its thickness governs the soak. */
   readonly governing: Line;
+  readonly medium: LoadGroup['medium'];
+  readonly quench: LoadGroup['quench'];
 }
+
+/** Why no load is planned for a line: what the tables lack for it, or what its part does not say. */
+export type NotPlanned =
+  | LoadPlan['unplaced'][number]['reason']
+  | 'material_not_known'
+  | 'not_wrought_aluminium'
+  | 'form_not_stated'
+  | 'condition_not_known'
+  | 'thickness_not_stated';
 
 export interface LoadsOfBatch<Line> {
   readonly method: LoadPlan['method'];
@@ -28,7 +40,7 @@ export interface LoadsOfBatch<Line> {
     readonly between: readonly [readonly Line[], readonly Line[]];
   })[];
   /** Nothing is concluded about them. */
-  readonly unplaced: readonly Line[];
+  readonly unplaced: readonly { readonly line: Line; readonly reason: NotPlanned }[];
 }
 
 /**
@@ -42,22 +54,29 @@ export function loadsOfBatch<Line extends LoadLine>(
   const treated = lines.filter(({ step }) => isLoadProcess(step.process));
   if (treated.length === 0) return null;
   const byStep = groupedBy(treated, ({ stepId }) => stepId);
-  const groups = [...byStep.values()].flatMap(([line]) => (line ? groupOf(tables, line) : []));
+  const asked = [...byStep.values()].flatMap(([line]) => (line ? [groupOf(tables, line)] : []));
+  const groups = asked.flatMap((one) => ('group' in one ? one.group : []));
   const plan = planLoads(tables.loads, groups, UNIFORMITY_C);
   const linesOf = (keys: readonly string[]) => keys.flatMap((key) => byStep.get(key) ?? []);
-  const placed = new Set(plan.loads.flatMap((load) => load.groups));
+  const reasons = new Map<string, NotPlanned>([
+    ...asked.flatMap((one) => ('reason' in one ? [[one.stepId, one.reason] as const] : [])),
+    ...plan.unplaced.map(({ group, reason }) => [group, reason] as const),
+  ]);
   return {
     method: plan.method,
     loads: plan.loads.flatMap((load) => {
       const together = inOrder(lines, linesOf(load.groups));
       const governing = together.find(({ part }) => part.thicknessMm === load.governingMm) ?? together[0];
-      return governing ? [{ ...load, lines: together, governing }] : [];
+      return governing ? [{ ...load, lines: together, governing, ...bathOf(governing.step) }] : [];
     }),
     apart: plan.apart.map(({ between: [one, other], ...why }) => ({
       ...why,
       between: [inOrder(lines, linesOf(one)), inOrder(lines, linesOf(other))] as const,
     })),
-    unplaced: treated.filter(({ stepId }) => !placed.has(stepId)),
+    unplaced: treated.flatMap((line) => {
+      const reason = reasons.get(line.stepId);
+      return reason ? [{ line, reason }] : [];
+    }),
   };
 }
 
@@ -74,20 +93,40 @@ function inOrder<Line>(all: readonly Line[], some: readonly Line[]): Line[] {
   return all.filter((line) => these.has(line));
 }
 
-function groupOf(tables: BatchTables, { stepId, part, step }: LoadLine): LoadGroup[] {
+type Asked = { readonly group: LoadGroup } | { readonly stepId: string; readonly reason: NotPlanned };
+
+function groupOf(tables: BatchTables, { stepId, part, step }: LoadLine): Asked {
+  const not = (reason: NotPlanned) => ({ stepId, reason });
   const found = metalOf(tables, part);
   const { process } = step;
-  if (found.known !== 'yes' || !isLoadProcess(process) || part.thicknessMm === null) return [];
+  if (found.known !== 'yes' || !isLoadProcess(process)) return not('material_not_known');
   const { alloy, family, form, clad } = found.material;
+  if (family !== 'wrought_aluminium') return not('not_wrought_aluminium');
+  if (!form) return not('form_not_stated');
   const from = temperOf(tables.material.tempers, step.conditionBefore ?? part.madeCondition);
   const to = temperOf(tables.material.tempers, step.targetCondition ?? part.endCondition);
-  if (family !== 'wrought_aluminium' || !form || !from || !to) return [];
+  if (!from || !to) return not('condition_not_known');
   const { thicknessMm } = part;
+  if (thicknessMm === null) return not('thickness_not_stated');
   const group = { key: stepId, alloy, form, clad, thicknessMm, thinnestMm: thicknessMm, from, to, process };
-  return [{ ...group, ...bathOf(step) }];
+  return { group: { ...group, ...bathOf(step) } };
 }
 
-function bathOf({ classType, specification }: LoadLine['step']): Pick<LoadGroup, 'medium' | 'quench'> {
+/** How long a line would soak if it were alone, in minutes; null where the table does not say. */
+export function soakAlone(
+  tables: BatchTables,
+  { part, step }: LoadLine,
+): { soakMin: number; longestMin: number | null } | null {
+  const found = metalOf(tables, part);
+  if (found.known !== 'yes' || part.thicknessMm === null) return null;
+  const { medium } = bathOf(step);
+  const section = { thicknessMm: part.thicknessMm, medium, clad: found.material.clad };
+  const soak = requiredSoak(tables.loads.soak, section);
+  return soak.ok ? { soakMin: soak.soakMin, longestMin: soak.longestMin } : null;
+}
+
+/** Air and cold water, unless the order names another. */
+export function bathOf({ classType, specification }: LoadLine['step']): Pick<LoadGroup, 'medium' | 'quench'> {
   const said = `${classType ?? ''} ${specification}`;
   const medium = /\bsalt\b/i.test(said) ? 'salt' : 'air';
   const [, named] = /\b(hot water|boiling water|polymer|glycol|spray)\b/i.exec(said) ?? [];

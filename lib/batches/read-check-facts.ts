@@ -6,10 +6,12 @@ import { approvals, processors, shopProcessors, shops } from '@/db/schema/organi
 import { parts, routeSteps } from '@/db/schema/parts';
 import type { Ctx } from '@/lib/auth/context';
 import { calendarDay } from '@/lib/day-words';
+import type { Equipment } from '@/lib/equipment/contract';
+import { readEquipment } from '@/lib/equipment/queries';
 import { notFound } from '@/lib/errors';
 import { tablesOf } from '@/lib/reference/tables-of';
 
-import type { CheckedLine, CheckedPart, CheckFacts } from './check';
+import type { CheckedEquipment, CheckedLine, CheckedPart, CheckFacts } from './check';
 import { groupedBy } from './grouped-by';
 import { solutionTreatedBefore } from './solution-treated-before';
 
@@ -50,11 +52,31 @@ export async function readCheckFacts(ctx: Ctx, batchId: string): Promise<CheckFa
       name: head.processorName,
       active: head.active,
       approvals: await readApprovals(ctx, batch.processorId),
+      equipment: (await readEquipment(ctx, batch.processorId)).map(checkedEquipment),
     },
     lines: await readLines(ctx, batchId),
     tables: tablesOf(ctx),
   };
 }
+
+const checkedEquipment = ({
+  length,
+  width,
+  height,
+  limit,
+  temperatureMin,
+  temperatureMax,
+  ...said
+}: Equipment): CheckedEquipment => ({
+  ...said,
+  ...{ lengthMm: length.value, widthMm: width.value, heightMm: height.value },
+  sizeWords: [length, width, height].map(({ entered }) => entered).join(' × '),
+  limitG: limit?.value ?? null,
+  limitWords: limit?.entered ?? null,
+  temperatureCMin: temperatureMin?.value ?? null,
+  temperatureCMax: temperatureMax?.value ?? null,
+  temperatureWords: [temperatureMin?.entered, temperatureMax?.entered].filter(Boolean).join(' to '),
+});
 
 const readApprovals = (ctx: Ctx, processorId: string) =>
   ctx.tx
@@ -77,6 +99,7 @@ async function readLines(ctx: Ctx, batchId: string): Promise<CheckedLine[]> {
       partId: lots.partId,
       partNumber: parts.number,
       partRevision: parts.revision,
+      partName: parts.name,
       supersededAt: parts.supersededAt,
       characteristics: sql<
         string[]
@@ -127,10 +150,11 @@ export async function readCheckedParts(
     .orderBy(asc(routeSteps.partId), asc(routeSteps.seq));
   const routes = groupedBy(steps, ({ partId }) => partId);
   return new Map(
-    found.map(({ thicknessEntered, ...part }) => [
-      part.id,
-      { ...part, thickness: thicknessEntered, route: routes.get(part.id) ?? [] },
-    ]),
+    found.map(({ thicknessEntered, lengthEntered, widthEntered, heightEntered, ...part }) => {
+      const said = [lengthEntered, widthEntered, heightEntered].filter((one) => one !== null);
+      const sizeWords = said.length > 0 ? said.join(' × ') : null;
+      return [part.id, { ...part, sizeWords, thickness: thicknessEntered, route: routes.get(part.id) ?? [] }];
+    }),
   );
 }
 

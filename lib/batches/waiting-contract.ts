@@ -4,6 +4,8 @@ import { declare } from '@/lib/api/endpoint';
 import { Id, Moment, PageQuery, pageOf } from '@/lib/api/shapes';
 import { PROCESSES } from '@/lib/trade/process';
 
+import { Computed } from './contract';
+
 const Step = z.object({
   process: z.enum(PROCESSES),
   specification: z.string(),
@@ -41,6 +43,7 @@ export const WaitingLot = z.object({
   pieces: z.int(),
   serialised: z.boolean(),
   massG: z.number().nullable(),
+  computed: Computed.nullable(),
   madeOn: Moment,
 });
 export type WaitingLot = z.output<typeof WaitingLot>;

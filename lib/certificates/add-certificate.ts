@@ -7,6 +7,7 @@ import { shopOf, type Ctx } from '@/lib/auth/context';
 import { AppError } from '@/lib/errors';
 import { requireVerifiedFile } from '@/lib/files/require-verified-file';
 import { newId } from '@/lib/ids';
+import { requestReading } from '@/lib/readings/request-reading';
 import { lockSentBatch } from '@/lib/receipts/lock-batch';
 
 /** Adds a certificate that came to the shop itself, on paper or by mail. */
@@ -31,6 +32,7 @@ export async function addCertificate(ctx: Ctx, { batchId, fileId }: { batchId: s
     sentBy: ctx.actor.name,
     createdAt: ctx.now,
   });
+  await requestReading(ctx, { fileId: file.id, kind: 'certificate' });
   await recordAudit(ctx, {
     action: 'certificate.add',
     entity: 'certificate',

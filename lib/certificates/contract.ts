@@ -241,7 +241,12 @@ export const decideRequirement = declare({
 
 export const DecideRequirements = DecideRequirement.omit({ requirementId: true, version: true }).extend({
   requirements: z
-    .array(DecideRequirement.pick({ requirementId: true, version: true }))
+    .array(
+      DecideRequirement.pick({ requirementId: true, version: true }).extend({
+        /** What it states of this one, where that differs. */
+        stated: words('What it states', 300).optional(),
+      }),
+    )
     .min(1, 'Choose at least one requirement.')
     .max(500),
 });

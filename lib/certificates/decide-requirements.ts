@@ -6,12 +6,13 @@ import type { Ctx } from '@/lib/auth/context';
 import type { DecideRequirements } from './contract';
 import { decideRequirement } from './decide-requirement';
 
-/** What a certificate states once for several lines, written to each of them: each has its decision and its record. */
+/** Several of one verdict: each has its decision and its record, and its own statement where one is given. */
 export async function decideRequirements(
   ctx: Ctx,
   { requirements, ...reading }: z.output<typeof DecideRequirements>,
 ) {
   authorize(ctx, 'certificate.prove');
-  for (const requirement of requirements) await decideRequirement(ctx, { ...reading, ...requirement });
+  for (const { stated, ...requirement } of requirements)
+    await decideRequirement(ctx, { ...reading, ...requirement, stated: stated ?? reading.stated });
   return { decided: requirements.length };
 }

@@ -34,7 +34,7 @@ export const Requirements = z.looseObject({
   hardness: Range.extend({ scale: z.string() }).optional(),
   conductivity_pct_iacs: Range.optional(),
   thickness: Range.extend({ unit: z.string() }).optional(),
-  bake: Setting.extend({
+  bake: Setting.partial().extend({
     min_hours: z.number().optional(),
     max_hours_after_plating: z.number().optional(),
   }).optional(),

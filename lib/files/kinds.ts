@@ -21,8 +21,8 @@ const PAPER = ['pdf', 'png', 'jpeg', 'tiff'] as const;
 const TAKEN: Partial<Record<FilePurpose, readonly FileKind[]>> = {
   drawing: PAPER,
   mill_certificate: PAPER,
-  certificate: PAPER,
-  invoice: PAPER,
+  certificate: [...PAPER, 'eml', 'txt'],
+  invoice: [...PAPER, 'eml', 'txt'],
   chart: ['csv', 'tsv', 'txt', ...PAPER],
   photo: ['jpeg', 'png', 'webp', 'heic', 'tiff'],
   concession: [...PAPER, 'eml', 'txt'],

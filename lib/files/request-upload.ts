@@ -23,6 +23,8 @@ type RequestUploadInput = z.output<(typeof declaration)['input']>;
 /** What a processor may send; drawings and mill certificates are the shop's own. */
 const FROM_PROCESSORS: readonly FilePurpose[] = ['certificate', 'chart', 'invoice', 'photo'];
 const NEEDS_BATCH: readonly FilePurpose[] = ['certificate', 'chart', 'invoice'];
+/** A certificate may come to the shop without saying which batch it is of: it waits in the intake. */
+const MAY_COME_ALONE: readonly FilePurpose[] = ['certificate'];
 
 /**
  * Announces a file. The address it gives can store these very bytes and no others: length, type and hash are in its
@@ -74,7 +76,7 @@ async function whereItBelongs(
   if (tenant.kind === 'processor' && !FROM_PROCESSORS.includes(purpose))
     throw new AppError('not_allowed', `Only the shop itself adds a ${purposeWords(purpose)}.`);
   if (batchId === undefined) {
-    if (tenant.kind === 'processor' || NEEDS_BATCH.includes(purpose))
+    if (tenant.kind === 'processor' || (NEEDS_BATCH.includes(purpose) && !MAY_COME_ALONE.includes(purpose)))
       throw new AppError('bad_input', 'Say for which batch this file is.', {
         fields: [{ field: 'batchId', message: 'Say for which batch this file is.' }],
       });

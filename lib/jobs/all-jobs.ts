@@ -1,5 +1,6 @@
 import { assembleDossierJob } from './definitions/assemble-dossier';
 import { payInvoiceJob } from './definitions/pay-invoice';
+import { readDocumentJob } from './definitions/read-document';
 import { renderDocumentsJob } from './definitions/render-documents';
 import { sendMailJob } from './definitions/send-mail';
 import { workPaymentEventJob } from './definitions/work-payment-event';
@@ -12,4 +13,5 @@ export const ALL_JOBS: readonly Job[] = [
   assembleDossierJob,
   payInvoiceJob,
   workPaymentEventJob,
+  readDocumentJob,
 ];

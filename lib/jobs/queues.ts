@@ -8,4 +8,5 @@ export const QUEUES = [
   { name: 'pay-invoice', retries: 14, retryDelayS: 5 },
   { name: 'work-payment-event', retries: 10, retryDelayS: 2 },
   { name: 'assemble-dossier', retries: 6, retryDelayS: 5 },
+  { name: 'read-document', retries: 4, retryDelayS: 5 },
 ] as const;

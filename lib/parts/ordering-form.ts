@@ -5,6 +5,8 @@ import type { OrderFact, OrderItem } from '@/lib/trade/ordering/order-item';
 import { orderingChecklist, type ChecklistItem } from '@/lib/trade/ordering/ordering-checklist';
 
 import { statedItems, type OrderingAnswers } from './ordering-answers';
+import { statedByRequirements } from './stated-by-requirements';
+import { strengthRangeOf } from './strength-of';
 
 /** What the part, the batch and the step itself put on every order; nobody types it twice. */
 const STATED_ELSEWHERE: readonly OrderItem[] = [
@@ -22,6 +24,9 @@ export interface OrderedStep {
   readonly conditionBefore: string;
   readonly targetCondition: string;
   readonly ordering: OrderingAnswers;
+  /** What its requirements name, and the condition that the part ends in: both state things on the order too. */
+  readonly characteristics?: readonly string[];
+  readonly endCondition?: string;
 }
 
 export interface OrderingForm {
@@ -42,7 +47,12 @@ export function orderingForm(
   const checklist = orderingChecklist(ordering, read.number, facts);
   if (!checklist.ok) return null;
   const elsewhere = new Set([...STATED_ELSEWHERE, ...saidByFields(step)]);
-  const stated = [...elsewhere, ...statedItems(step.ordering).map(({ id }) => id)];
+  const stated = [
+    ...elsewhere,
+    ...statedItems(step.ordering).map(({ id }) => id),
+    ...statedByRequirements(step.characteristics ?? []),
+    ...saidByStrength(`${step.targetCondition} ${step.endCondition ?? ''}`),
+  ];
   const open = missingItems({ ordering, commonest: commonlyMissing }, read.number, { stated, facts });
   return {
     asked: checklist.items.filter(({ item }) => !elsewhere.has(item)),
@@ -50,7 +60,18 @@ export function orderingForm(
   };
 }
 
-function saidByFields({ classType, conditionBefore, targetCondition }: OrderedStep): OrderItem[] {
+/** A condition that names a strength or hardness states it. */
+function saidByStrength(condition: string): OrderItem[] {
+  const { tensileMpa, hrc } = strengthRangeOf(condition);
+  return tensileMpa || hrc ? ['steel_strength', 'hardness_or_strength'] : [];
+}
+
+function saidByFields({
+  specification,
+  classType,
+  conditionBefore,
+  targetCondition,
+}: OrderedStep): OrderItem[] {
   const says = (item: OrderItem, word: RegExp): OrderItem[] => (word.test(classType) ? [item] : []);
   return [
     ...says('type', /\btype\b/i),
@@ -58,6 +79,7 @@ function saidByFields({ classType, conditionBefore, targetCondition }: OrderedSt
     ...says('grade', /\bgrade\b/i),
     ...says('method', /\bmethod\b/i),
     ...says('sensitivity', /\blevel\b/i),
+    ...(/\d\/\d/.test(specification) ? (['slash_sheet'] as const) : []),
     ...(conditionBefore === '' ? [] : (['condition_before'] as const)),
     ...(targetCondition === '' ? [] : (['condition_after'] as const)),
   ];

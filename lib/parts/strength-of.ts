@@ -13,13 +13,28 @@ const HARDNESS = new RegExp(String.raw`(?:HRC|RC|Rockwell\s*C)\s*${RANGE}|${RANG
  * then nothing is known of the highest, and the answer is empty.
  */
 export function strengthOf(condition: string): Strength {
-  const [, , tensile, unit] = TENSILE.exec(condition) ?? [];
-  const [, , before, , behind] = HARDNESS.exec(condition) ?? [];
-  const hardness = before ?? behind;
+  const { tensileMpa, hrc } = strengthRangeOf(condition);
   return {
-    ...(tensile !== undefined && {
-      tensileMpa: unit?.toLowerCase() === 'ksi' ? mpaFromKsi(Number(tensile)) : Number(tensile),
-    }),
-    ...(hardness !== undefined && { hrc: Number(hardness) }),
+    ...(tensileMpa && { tensileMpa: tensileMpa[1] }),
+    ...(hrc && { hrc: hrc[1] }),
+  };
+}
+
+export interface StrengthRange {
+  readonly tensileMpa?: readonly [number, number];
+  readonly hrc?: readonly [number, number];
+}
+
+/** Both ends of the strength that a condition names: `160 to 180 ksi` in MPa, `HRC 36-40`; a single figure is no range. */
+export function strengthRangeOf(condition: string): StrengthRange {
+  const [, lowest, highest, unit] = TENSILE.exec(condition) ?? [];
+  const [, lowBefore, before, lowBehind, behind] = HARDNESS.exec(condition) ?? [];
+  const [soft, hard] = [lowBefore ?? lowBehind, before ?? behind];
+  const inMpa = (typed: string) =>
+    unit?.toLowerCase() === 'ksi' ? mpaFromKsi(Number(typed)) : Number(typed);
+  return {
+    ...(lowest !== undefined &&
+      highest !== undefined && { tensileMpa: [inMpa(lowest), inMpa(highest)] as const }),
+    ...(soft !== undefined && hard !== undefined && { hrc: [Number(soft), Number(hard)] as const }),
   };
 }

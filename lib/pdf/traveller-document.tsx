@@ -11,6 +11,7 @@ import { Asked, Bulleted, Cells, contentWidth, Hand, Heading, Paper, TagHead } f
 import { counted, paperDay, paperMoment, workAsked } from './paper-words';
 import { QrCode } from './qr-code';
 import { TravellerLines } from './traveller-lines';
+import { TravellerLoads, TravellerSamples } from './traveller-loads';
 
 const STRAW = '#D9B44A';
 const CODE_SIZE = 72;
@@ -48,6 +49,10 @@ export function TravellerDocument({
           <TravellerLines lines={lines} />
         </View>
         {content.note && <Text style={{ ...type.text, marginTop: 5 }}>{content.note}</Text>}
+        {content.furnaceLoads && <TravellerLoads furnace={content.furnaceLoads} />}
+        {content.samples !== undefined && content.samples.length > 0 && (
+          <TravellerSamples samples={content.samples} />
+        )}
         {content.orderStates !== undefined && content.orderStates.length > 0 && (
           <OrderStates states={content.orderStates} />
         )}
@@ -62,11 +67,16 @@ export function TravellerDocument({
         <Hands content={content} />
         <Text style={{ ...type.caption, fontSize: 7.8, marginTop: 5 }}>
           The drawing, the order and the governing specification at the revision named come first, then this
-          page. It releases nothing by itself.
+          page. It releases nothing by itself.{referencesWords(content)}
         </Text>
       </Paper>
     </Document>
   );
+}
+
+function referencesWords({ furnaceLoads }: TravellerContent): string {
+  if (!furnaceLoads || furnaceLoads.sources.length === 0) return '';
+  return ` Figures of the loads are reference values, and what must be proved goes before them: ${furnaceLoads.sources.join('; ')}.`;
 }
 
 function Head({ content, url, version }: { content: TravellerContent; url: string | null; version: string }) {

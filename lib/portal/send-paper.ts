@@ -12,6 +12,7 @@ import { refreshStanding } from '@/lib/batches/refresh-standing';
 import { AppError } from '@/lib/errors';
 import { requireVerifiedFile } from '@/lib/files/require-verified-file';
 import { newId } from '@/lib/ids';
+import { requestReading } from '@/lib/readings/request-reading';
 import type { LockedBatch } from '@/lib/receipts/lock-batch';
 
 import type { PaperKind, sendPaper as declaration } from './contract';
@@ -42,6 +43,7 @@ export async function sendPaper(
       entityId: id,
       after: { batchId, file: file.name, sha256: file.sha256 },
     });
+    await requestReading(inner, { fileId, kind });
     await refreshStanding(inner, batchId);
     return { id };
   });

@@ -1,9 +1,11 @@
 import { spawn } from 'node:child_process';
 
+export type Output = 'show' | 'show_at_end' | 'keep';
+
 interface RunOptions {
   readonly env: Readonly<Record<string, string>>;
-  /** Shown as it comes, or kept for the case that something goes wrong. */
-  readonly output: 'show' | 'keep';
+  /** Shown as it comes, shown whole at the end, or kept (its last part) for the case that something goes wrong. */
+  readonly output: Output;
   readonly onStart?: ((pid: number) => void) | undefined;
 }
 
@@ -29,12 +31,17 @@ export function runToEnd(args: readonly string[], { env, output, onStart }: RunO
       onStart?.(pid);
     }
     let kept = '';
+    const most = output === 'keep' ? 8000 : Infinity;
     for (const stream of [child.stdout, child.stderr]) {
-      stream?.on('data', (chunk: Buffer) => (kept = (kept + chunk.toString()).slice(-8000)));
+      stream?.on('data', (chunk: Buffer) => {
+        kept += chunk.toString();
+        if (kept.length > most) kept = kept.slice(-most);
+      });
     }
     child.once('error', (error) => resolve({ code: 1, output: error.message }));
     child.once('close', (code) => {
       if (pid !== undefined) running.delete(pid);
+      if (output === 'show_at_end') process.stdout.write(kept);
       resolve({ code: code ?? 1, output: kept.trim() });
     });
   });

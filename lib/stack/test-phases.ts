@@ -1,6 +1,6 @@
 import { existsSync, mkdirSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
-import { runToEnd } from './run-to-end';
+import { type Output, runToEnd } from './run-to-end';
 import { type Tally, tallyPlaywright, tallyVitest } from './tally';
 
 type Env = Readonly<Record<string, string>>;
@@ -9,7 +9,9 @@ export interface Phase {
   readonly name: string;
   /** How much of the stack must stand before it can run. */
   readonly needs: 'nothing' | 'database' | 'stack';
-  run(env: Env): Promise<Tally>;
+  /** Phases of one lane run one after another, the lanes side by side; what `behind` finds is shown at its end. */
+  readonly lane: 'front' | 'behind';
+  run(env: Env, output: Output): Promise<Tally>;
 }
 
 const FEWEST_MODULES = 100;
@@ -19,28 +21,33 @@ const bin = (...path: string[]) => join('node_modules', ...path);
 const NEXT = bin('next', 'dist', 'bin', 'next');
 const VITEST = bin('vitest', 'vitest.mjs');
 
-/** In the order in which they run: what is cheap and says most first. */
+/** In the order in which they run in their lane: what is cheap and says most first. */
 export const PHASES: readonly Phase[] = [
   {
     name: 'types',
     needs: 'nothing',
-    async run(env) {
+    lane: 'front',
+    async run(env, output) {
       // The types of the routes are generated; without them every page has an unknown `PageProps`.
-      const generated = await runNode([NEXT, 'typegen'], env);
+      const generated = await runNode([NEXT, 'typegen'], env, output);
       return check(
-        generated === 0 ? await runNode([bin('typescript', 'bin', 'tsc'), '--noEmit'], env) : generated,
+        generated === 0
+          ? await runNode([bin('typescript', 'bin', 'tsc'), '--noEmit'], env, output)
+          : generated,
       );
     },
   },
   {
     name: 'lint',
     needs: 'nothing',
-    run: async (env) =>
-      check(await runNode([bin('eslint', 'bin', 'eslint.js'), '.', '--max-warnings', '0'], env)),
+    lane: 'front',
+    run: async (env, output) =>
+      check(await runNode([bin('eslint', 'bin', 'eslint.js'), '.', '--max-warnings', '0'], env, output)),
   },
   {
     name: 'boundaries',
     needs: 'nothing',
+    lane: 'front',
     async run(env) {
       const folders = ['app', 'components', 'emails', 'lib', 'db', 'fakes'].filter((folder) =>
         existsSync(folder),
@@ -57,28 +64,30 @@ export const PHASES: readonly Phase[] = [
   {
     name: 'unused',
     needs: 'nothing',
-    run: async (env) => check(await runNode([bin('knip', 'bin', 'knip.js')], env)),
+    lane: 'front',
+    run: async (env, output) => check(await runNode([bin('knip', 'bin', 'knip.js')], env, output)),
   },
-  { name: 'unit', needs: 'nothing', run: (env) => runVitest('unit', env) },
-  { name: 'services', needs: 'database', run: (env) => runVitest('services', env) },
-  { name: 'e2e', needs: 'stack', run: runPlaywright },
-  { name: 'faults', needs: 'database', run: (env) => runVitest('faults', env) },
+  vitest('unit', { needs: 'nothing', lane: 'front' }),
+  { name: 'e2e', needs: 'stack', lane: 'front', run: runPlaywright },
+  vitest('services', { needs: 'database', lane: 'behind' }),
+  vitest('faults', { needs: 'database', lane: 'behind' }),
 ];
 
-async function runVitest(project: string, env: Env): Promise<Tally> {
+function vitest(name: string, where: Pick<Phase, 'needs' | 'lane'>): Phase {
+  return { name, ...where, run: (env, output) => runVitest(name, env, output) };
+}
+
+async function runVitest(project: string, env: Env, output: Output): Promise<Tally> {
   const file = freshReport(project);
   const reporters = ['--reporter=default', '--reporter=json', `--outputFile.json=${file}`];
-  const code = await runNode([VITEST, 'run', '--project', project, ...reporters], {
-    ...env,
-    LOG_LEVEL: 'silent',
-    VITE_CONFIG_NATIVE_IGNORE_WARNING: 'true',
-  });
+  const quiet = { ...env, LOG_LEVEL: 'silent', VITE_CONFIG_NATIVE_IGNORE_WARNING: 'true' };
+  const code = await runNode([VITEST, 'run', '--project', project, ...reporters], quiet, output);
   return tallyVitest(file, code);
 }
 
-async function runPlaywright(env: Env): Promise<Tally> {
+async function runPlaywright(env: Env, output: Output): Promise<Tally> {
   const file = freshReport('e2e');
-  const code = await runNode([bin('@playwright', 'test', 'cli.js'), 'test'], env);
+  const code = await runNode([bin('@playwright', 'test', 'cli.js'), 'test'], env, output);
   return tallyPlaywright(file, code);
 }
 
@@ -93,7 +102,7 @@ function freshReport(name: string): string {
 const check = (exitCode: number): Tally =>
   exitCode === 0 ? { passed: 1, failed: 0 } : { passed: 0, failed: 1 };
 
-async function runNode(args: readonly string[], env: Env): Promise<number> {
-  const { code } = await runToEnd(args, { env, output: 'show' });
+async function runNode(args: readonly string[], env: Env, output: Output): Promise<number> {
+  const { code } = await runToEnd(args, { env, output });
   return code;
 }

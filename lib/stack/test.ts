@@ -1,6 +1,7 @@
 import { CannotStart } from '@/db/cannot-start';
 import { runApt } from '@/db/postgres-binaries';
 import { findChromium } from './chromium';
+import type { Output } from './run-to-end';
 import { stackSettings } from './settings';
 import { Stack } from './stack';
 import { sum, type Tally } from './tally';
@@ -33,15 +34,14 @@ async function main(): Promise<void> {
   });
   endOnSignals(stack);
 
-  const tallies: [string, Tally][] = [];
   const began = Date.now();
-  for (const phase of phases) {
-    const phaseBegan = Date.now();
-    report(`\n── ${phase.name} ${'─'.repeat(Math.max(0, 60 - phase.name.length))}`);
-    const tally = await runPhase(phase, stack, settings.env);
-    tallies.push([phase.name, tally]);
-    report(`${phase.name}: ${tally.passed} passed, ${tally.failed} failed, ${seconds(phaseBegan)} s`);
-  }
+  const lane = (name: Phase['lane']) => phases.filter((phase) => phase.lane === name);
+  const [front, behind] = [lane('front'), lane('behind')];
+  const lanes = await Promise.all([
+    runLane(front, { stack, env: settings.env, output: 'show' }),
+    runLane(behind, { stack, env: settings.env, output: front.length === 0 ? 'show' : 'show_at_end' }),
+  ]);
+  const tallies = lanes.flat();
   await stack.stop();
   if (death !== undefined) tallies.push(['a part of the stack died', { passed: 0, failed: 1 }]);
 
@@ -55,12 +55,30 @@ async function main(): Promise<void> {
   process.exit(total.failed === 0 ? 0 : 1);
 }
 
+interface Run {
+  readonly stack: Stack;
+  readonly env: Readonly<Record<string, string>>;
+  readonly output: Output;
+}
+
+async function runLane(phases: readonly Phase[], run: Run): Promise<[string, Tally][]> {
+  const tallies: [string, Tally][] = [];
+  for (const phase of phases) {
+    const began = Date.now();
+    report(`\n── ${phase.name} ${'─'.repeat(Math.max(0, 60 - phase.name.length))}`);
+    const tally = await runPhase(phase, run);
+    tallies.push([phase.name, tally]);
+    report(`${phase.name}: ${tally.passed} passed, ${tally.failed} failed, ${seconds(began)} s`);
+  }
+  return tallies;
+}
+
 /** Whatever goes wrong on the way to a phase is a failure of that phase; the others still run. */
-async function runPhase(phase: Phase, stack: Stack, env: Readonly<Record<string, string>>): Promise<Tally> {
+async function runPhase(phase: Phase, { stack, env, output }: Run): Promise<Tally> {
   try {
     if (phase.needs !== 'nothing') await once('database', () => openDatabase(stack));
     if (phase.needs === 'stack') await once('stack', () => openProduct(stack));
-    return await phase.run(env);
+    return await phase.run(env, output);
   } catch (error) {
     console.error(error instanceof CannotStart ? error.message : error);
     return { passed: 0, failed: 1 };

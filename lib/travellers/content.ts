@@ -33,6 +33,36 @@ const StatedForLines = z.object({
 });
 export type StatedForLines = z.infer<typeof StatedForLines>;
 
+/** One furnace load: what it is run at, row by row, in words. */
+const TravellerLoad = z.object({
+  number: z.int(),
+  lines: z.array(z.int()),
+  pieces: z.int(),
+  rows: z.array(z.object({ name: z.string(), says: z.string(), rest: z.string() })),
+});
+export type TravellerLoad = z.infer<typeof TravellerLoad>;
+
+const TravellerLoads = z.object({
+  /** Set line by line; else as planned. */
+  areSet: z.boolean(),
+  loads: z.array(TravellerLoad),
+  /** Why loads may not be joined. */
+  apart: z.array(z.string()),
+  /** Tables that the figures were read from. */
+  sources: z.array(z.string()),
+});
+export type TravellerLoads = z.infer<typeof TravellerLoads>;
+
+/** How many pieces of a line are looked at. */
+const SampleOfLines = z.object({
+  lineNo: z.int(),
+  inspect: z.int(),
+  pieces: z.int(),
+  says: z.string(),
+  plan: z.string(),
+});
+export type SampleOfLines = z.infer<typeof SampleOfLines>;
+
 /**
  * All that a batch's papers show, kept as it was stated: what is made from it again is the same to the byte. Later
  * layouts read older contents, so fields are only ever added, with a default.
@@ -64,6 +94,9 @@ export const TravellerContent = Stated.extend({
   lines: z.array(ContentLine),
   requirements: z.array(ContentRequirement),
   cautions: z.array(z.string()),
+  /** Contents from before loads were planned have none; a process without a furnace has null. */
+  furnaceLoads: TravellerLoads.nullish(),
+  samples: z.array(SampleOfLines).optional(),
   /** Blockers that were let pass, with who did and why. */
   overrides: z.array(
     z.object({ what: z.string(), reason: z.string(), by: z.string(), at: z.iso.datetime() }),

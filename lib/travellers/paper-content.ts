@@ -1,17 +1,18 @@
-import { asc, eq, inArray } from 'drizzle-orm';
+import { and, asc, desc, eq, inArray } from 'drizzle-orm';
 
-import { batches, batchLines, requirements } from '@/db/schema/batches';
+import { batchDocuments, batches, batchLines, requirements } from '@/db/schema/batches';
 import { processors, shopProcessors, shops } from '@/db/schema/organisations';
 import { users } from '@/db/schema/people';
 import type { Ctx } from '@/lib/auth/context';
 import { readLinesAsTheyAre } from '@/lib/batches/freeze-lines';
-import { readOverrides } from '@/lib/batches/read-check-facts';
+import { readCheckFacts, readOverrides } from '@/lib/batches/read-check-facts';
 import { specificationWords } from '@/lib/batches/step-asked';
 import { env } from '@/lib/env';
 import { notFound } from '@/lib/errors';
 
 import { cautionsOf } from './cautions';
-import { paperOf, type OrderContent, type TravellerContent } from './content';
+import { paperOf, TravellerContent, type OrderContent, type Paper } from './content';
+import { loadsForPaper, samplesForPaper } from './loads-for-paper';
 import { orderStatesOf } from './order-states';
 import { OVERRIDDEN_WORDS } from './overridden-words';
 
@@ -62,6 +63,7 @@ export async function readPaperContents(
         batch.process,
         lines.map(({ material }) => material),
       ),
+      ...(await readLoads(ctx, batchId, stated.paper)),
       overrides: await readPassed(ctx, batchId),
       link: link === null ? null : { base: `${env.APP_URL}/b/`, linkId: link },
     },
@@ -97,6 +99,29 @@ export async function readPaperContents(
       ),
     },
   };
+}
+
+/**
+ * Loads and samples; once they were stated on a traveller they stay so, whatever is changed in a part afterwards, as
+ * the lines do.
+ */
+async function readLoads(
+  ctx: Ctx,
+  batchId: string,
+  paper: Paper,
+): Promise<Pick<TravellerContent, 'furnaceLoads' | 'samples'>> {
+  const [last] = await ctx.tx
+    .select({ content: batchDocuments.content })
+    .from(batchDocuments)
+    .where(and(eq(batchDocuments.batchId, batchId), eq(batchDocuments.kind, 'traveller')))
+    .orderBy(desc(batchDocuments.documentVersion))
+    .limit(1);
+  if (last) {
+    const { furnaceLoads, samples } = TravellerContent.parse(last.content);
+    return { ...(furnaceLoads === undefined ? {} : { furnaceLoads }), ...(samples ? { samples } : {}) };
+  }
+  const { tables, lines } = await readCheckFacts(ctx, batchId);
+  return { furnaceLoads: loadsForPaper(tables, lines, paper), samples: samplesForPaper(tables, lines) };
 }
 
 const copied = ({ documentVersion, changes }: Version) => ({ documentVersion, changes: [...changes] });

@@ -7,9 +7,13 @@ import { ALL_ENDPOINTS } from '@/lib/api/all-endpoints';
 import type { Declaration, Side } from '@/lib/api/endpoint';
 import { PERMISSIONS } from '@/lib/auth/permissions';
 import { SHOP_ROLES, type Role } from '@/lib/auth/roles';
+import { inOwningShop } from '@/lib/files/in-owning-shop';
 import { newId } from '@/lib/ids';
+import { sendPaper } from '@/lib/portal/send-paper';
+import { addToIntake } from '@/lib/readings/settle-intake';
 
 import { makeDispatchedBatch } from '../factories/batches';
+import { makeFile } from '../factories/evidence';
 import { ALL, makeApprovedInvoice } from '../factories/invoices';
 import { makeWorld, type World } from '../factories/world';
 import { cookieFor, makeSignedIn, openApi, send } from './harness';
@@ -42,6 +46,9 @@ let linkId: string;
 beforeAll(async () => {
   [shopA, shopB] = [await makeWorld(base.db, base.owner), await makeWorld(base.db, base.owner)];
   await makeApprovedInvoice(shopA, base.owner);
+  await shopA.as(ALL, async (ctx) =>
+    addToIntake(ctx, { fileId: await makeFile(ctx, { purpose: 'certificate' }) }),
+  );
   const [batch, linked] = await shopA.as(
     ALL,
     async (ctx) =>
@@ -50,6 +57,12 @@ beforeAll(async () => {
         await makeDispatchedBatch(ctx, shopA.processorId),
       ] as const,
   );
+  await shopA.asProcessor(async (ctx) => {
+    const fileId = await inOwningShop(ctx, shopA.shopId, (inner) =>
+      makeFile(inner, { purpose: 'chart', batchId: batch.id, processorId: shopA.processorId }),
+    );
+    await sendPaper(ctx, { batchId: batch.id, kind: 'chart', fileId });
+  });
   linkId = newId();
   await base.owner.insert(batchLinks).values({
     id: linkId,
@@ -70,12 +83,15 @@ const TABLES = {
   partId: 'parts',
   stepId: 'route_steps',
   certificateId: 'certificates',
+  chartId: 'charts',
+  intakeId: 'intake',
   invoiceId: 'invoices',
   fileId: 'files',
   receiptId: 'receipts',
   nonconformanceId: 'nonconformances',
   documentId: 'batch_documents',
   approvalId: 'approvals',
+  equipmentId: 'equipment',
   releaseId: 'releases',
   locationId: 'locations',
   messageId: 'messages',

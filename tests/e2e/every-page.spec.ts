@@ -1,5 +1,7 @@
 import type { APIRequestContext } from '@playwright/test';
 
+import { SUBJECTS } from '@/components/reference/subjects';
+
 import { expect, test } from './support/journey';
 import { fitsTheWindow, looksRight } from './support/look';
 
@@ -93,6 +95,7 @@ const WALKS = [
   { name: 'Auditor', email: 'ada@merganser.test', pages: ['/', '/batches/{batch}', '/audit'] },
   { name: 'Processor', email: 'desk@galena-thermal.test', pages: PROCESSOR },
   { name: 'Nobody', email: null, pages: NOBODY },
+  { name: 'Bench', email: null, pages: Object.keys(SUBJECTS).map((subject) => `/reference/${subject}`) },
 ] as const;
 
 /** Day at a desk and on a phone, night on a tablet; the contrast of both palettes is reckoned in a test of its own. */

@@ -32,7 +32,13 @@ export async function givePassword(owner: Db, userId: string): Promise<void> {
 /** The record of a file that arrived whole; its bytes are nobody's concern here. */
 export async function makeFile(
   ctx: Ctx,
-  given: { purpose: FilePurpose; batchId?: string; state?: FileState; content?: string },
+  given: {
+    purpose: FilePurpose;
+    batchId?: string;
+    processorId?: string;
+    state?: FileState;
+    content?: string;
+  },
 ): Promise<string> {
   const id = newId();
   const sha256 = createHash('sha256')
@@ -42,6 +48,7 @@ export async function makeFile(
     id,
     shopId: shopOf(ctx),
     batchId: given.batchId ?? null,
+    processorId: given.processorId ?? null,
     purpose: given.purpose,
     name: `${id.slice(-4)}.pdf`,
     mediaType: 'application/pdf',

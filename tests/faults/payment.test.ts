@@ -34,7 +34,8 @@ beforeAll(async () => {
 test(`payment order, the door killed in ${ROUNDS} rounds: there is one attempt and one job for it`, async () => {
   const { world, cookie } = shop;
   await inRounds(setting.door, 3, async (disturb, number) => {
-    const amountMinor = 10_000 + number;
+    // Whole dollars: the stand-in declines some amounts by their cents.
+    const amountMinor = 100 * (100 + number);
     const { invoiceId, version } = await makeApprovedInvoice(world, setting.owner, {
       pieces: 1,
       unitPriceMinor: amountMinor,

@@ -135,6 +135,7 @@ function understoodOf({ recording, examined }: Seen): JudgedChart['understood'] 
     unit: recording.unit,
     rows: recording.seconds.length,
     channels: recording.channels.map(({ name, role, column }) => ({
+      column,
       name,
       role,
       excluded: excludedOf(column),

@@ -37,6 +37,8 @@ export const ChartFlag = z.object({
 export type ChartFlag = z.output<typeof ChartFlag>;
 
 export const UnderstoodChannel = z.object({
+  /** In the file, from 0. */
+  column: z.int(),
   name: z.string(),
   role: ChannelRole,
   excluded: Exclusion.nullable(),

@@ -8,6 +8,7 @@ import {
 } from '@/lib/evidence/certificate/certificate';
 import { compare } from '@/lib/evidence/certificate/compare/compare';
 import { matchOrder } from '@/lib/evidence/certificate/match/match-order';
+import { factsAsFiled } from '@/lib/evidence/open/as-filed';
 import type { Order } from '@/lib/evidence/order';
 import type { OpenedFile } from '@/lib/evidence/page';
 
@@ -67,6 +68,7 @@ export function certificateDocument(
   const { sha256, kind, recognised, pages } = opened;
   return PrintedCertificate.parse({
     ...stated,
+    facts: factsAsFiled(stated.facts, pages),
     ...compared,
     file: { sha256, pages: pages.length, kind, recognised },
     observations: [...othersWords(others), ...compared.observations],

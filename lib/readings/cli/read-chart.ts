@@ -12,7 +12,7 @@ const USAGE =
 /** What `read:chart` prints. */
 const PrintedChart = JudgedChart.omit({ facts: true }).extend({
   understood: Understood.pick({ delimiter: true, decimal: true, time: true, unit: true, rows: true }).extend({
-    channels: UnderstoodChannel.array(),
+    channels: UnderstoodChannel.omit({ column: true }).array(),
   }),
 });
 

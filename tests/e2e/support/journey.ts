@@ -52,7 +52,8 @@ export class Person {
   /** Gives a file: the button and the file in the system's own window. */
   async gives(target: Locator, name: string, content: Buffer): Promise<void> {
     this.spends({ clicks: 2 });
-    await this.waiting(() => target.setInputFiles({ name, mimeType: 'application/pdf', buffer: content }));
+    const mimeType = name.endsWith('.csv') ? 'text/csv' : 'application/pdf';
+    await this.waiting(() => target.setInputFiles({ name, mimeType, buffer: content }));
   }
 
   async key(key: string): Promise<void> {

@@ -236,7 +236,7 @@ test('two of the same at once: one counts', async () => {
   expect(new Set(ids.map(({ file }) => file.id)).size).toBe(1);
 });
 
-test('a certificate for a batch that has not left is refused, and so is one for no batch', async () => {
+test('a certificate for a batch that has not left is refused; only certificates may come for no batch yet', async () => {
   const { world, lead } = await setup();
   const batchId = await batchOf(world, false);
   await expect(
@@ -245,8 +245,21 @@ test('a certificate for a batch that has not left is refused, and so is one for 
     code: 'conflict',
     message: expect.stringMatching(/has not been dispatched yet/) as string,
   });
+  const alone = await announceUpload(lead, {
+    purpose: 'certificate',
+    name: 'c.pdf',
+    content: somePdf(newId()),
+  });
+  expect(alone.upload).not.toBeNull();
   await expect(
-    announceUpload(lead, { purpose: 'certificate', name: 'c.pdf', content: somePdf(newId()) }),
+    announceUpload(lead, { purpose: 'invoice', name: 'i.pdf', content: somePdf(newId()) }),
+  ).rejects.toMatchObject({ code: 'bad_input' });
+  await expect(
+    announceUpload((work) => world.asProcessor(work), {
+      purpose: 'certificate',
+      name: 'c.pdf',
+      content: somePdf(newId()),
+    }),
   ).rejects.toMatchObject({ code: 'bad_input' });
 });
 

@@ -98,6 +98,9 @@ test('a reference from one shop’s table to another’s carries the shop, so th
   ).toEqual([]);
 });
 
+/** How long something took: measured, and nobody sums it up. */
+const MEASURED = ['readings.seconds'];
+
 test('every column that names a moment carries its zone, and money is whole', async () => {
   expect(
     await names(
@@ -108,5 +111,5 @@ test('every column that names a moment carries its zone, and money is whole', as
     await names(
       sql`select format('%s.%s', table_name, column_name) as name from information_schema.columns where table_schema = 'public' and (data_type in ('real', 'double precision', 'money') or column_name like '%\_minor' and data_type <> 'bigint')`,
     ),
-  ).toEqual([]);
+  ).toEqual(MEASURED);
 });

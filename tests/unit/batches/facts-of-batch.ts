@@ -10,6 +10,14 @@ export const STEP: CheckedStep = {
   classType: 'type II class 1',
   conditionBefore: null,
   targetCondition: null,
+  ordering: {
+    areas: 'all over',
+    sampling_plan: 'by the specification',
+    coating_thickness: 'by the class',
+    abrasion_test: 'none',
+    build_up: 'before coating',
+    contact_marks: 'in holes',
+  },
 };
 
 const PART: CheckedPart = {
@@ -18,6 +26,12 @@ const PART: CheckedPart = {
   form: 'sheet',
   clad: false,
   thicknessMm: 1.6,
+  lengthMm: null,
+  widthMm: null,
+  heightMm: null,
+  massG: null,
+  areaMm2: null,
+  sizeWords: null,
   thickness: '0.063 in',
   madeCondition: 'T6',
   endCondition: 'T6',
@@ -39,6 +53,7 @@ export const LINE: CheckedLine = {
   lotNumber: 'L-0001',
   partNumber: 'P-1',
   partRevision: 'A',
+  partName: 'Rib clip',
   partSuperseded: false,
   part: PART,
   stepId: STEP.id,
@@ -80,7 +95,13 @@ export const factsOf = (
   lines: readonly CheckedLine[] = [LINE],
   given: { batch?: Partial<CheckFacts['batch']>; processor?: Partial<CheckFacts['processor']> } = {},
 ): CheckFacts => {
-  const { id: _, conditionBefore: __, targetCondition: ___, ...asked } = lines[0]?.step ?? STEP;
+  const {
+    id: _,
+    conditionBefore: __,
+    targetCondition: ___,
+    ordering: ____,
+    ...asked
+  } = lines[0]?.step ?? STEP;
   return {
     zone: 'UTC',
     now: new Date('2026-06-17T12:00:00Z'),
@@ -102,6 +123,7 @@ export const factsOf = (
       name: 'Ostrow',
       active: true,
       approvals: [{ ...APPROVAL, processes: [asked.process] }],
+      equipment: [],
       ...given.processor,
     },
     lines,

@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest';
 
 import { calledSpecification } from '@/lib/parts/called-specification';
-import { computedMass } from '@/lib/parts/computed-mass';
+import { computedMass, typedSizes } from '@/lib/parts/computed-mass';
 import { conditionsAfter, explainTyped, knownConditions } from '@/lib/parts/condition-choices';
 import { materialOf } from '@/lib/parts/material-of';
 import { orderingForm } from '@/lib/parts/ordering-form';
@@ -99,7 +99,8 @@ test('what is stated is missing no longer; blanks state nothing', () => {
   expect(stated('  ')).toContain('next_step');
 });
 
-const SIZES = { length: '1000 mm', width: '500 mm', height: '', thickness: '2 mm' };
+const TYPED = { length: '1000 mm', width: '500 mm', height: '', thickness: '2 mm' };
+const SIZES = typedSizes(TYPED);
 
 test('a 2024 sheet of 1000 × 500 × 2 mm: 2.77 kg and 1.006 m², edges included', () => {
   const found = computedMass(PART_TABLES, of('2024'), SIZES, 'T42');
@@ -108,7 +109,7 @@ test('a 2024 sheet of 1000 × 500 × 2 mm: 2.77 kg and 1.006 m², edges included
 });
 
 test.each([
-  ['a size is missing', of('2024'), { ...SIZES, width: '' }],
+  ['a size is missing', of('2024'), typedSizes({ ...TYPED, width: '' })],
   ['an extrusion is no plain shape', of('2024', 'extrusion'), SIZES],
   ['the alloy is not known', of('unobtainium'), SIZES],
 ])('nothing is computed where %s', (_, material, sizes) =>

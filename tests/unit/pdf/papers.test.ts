@@ -88,6 +88,34 @@ test('what an admin let pass, and what changed, is printed', async () => {
   expect(page).toContain('The renewed approval is in the post. Marek Dole');
 });
 
+test('each load says what governs its soak, and samples their size', async () => {
+  const rows = [
+    { name: 'Soak', says: '30 to 35 min', rest: 'window 5 min: clad metal ends it' },
+    { name: 'Governs', says: '0.032 in', rest: 'thickest section, line 1' },
+  ];
+  const load = (number: number) => ({ number, lines: [number], pieces: 14, rows });
+  const content = sampleTraveller({
+    furnaceLoads: {
+      areSet: true,
+      loads: [load(1), load(2), load(3)],
+      apart: ['line 1 and line 2: they are quenched differently'],
+      sources: ['MIL-H-6088G (from memory, medium trust)'],
+    },
+    samples: [{ lineNo: 4, inspect: 13, pieces: 60, says: 'accept 0, reject 1', plan: 'AQL 1, level II' }],
+  });
+  const paper = (await readPdf(await renderPaper(content, tokenOf))).join(' ');
+  for (const said of [
+    'Load 3',
+    'line 2: 14 pieces',
+    '30 to 35 min',
+    'thickest section, line 1',
+    'The loads may not be joined: line 1 and line 2: they are quenched differently.',
+    '13 of 60, accept 0, reject 1',
+    'goes before them: MIL-H-6088G (from memory, medium trust).',
+  ])
+    expect(paper).toContain(said);
+});
+
 test('the order states prices, the minimum and what the invoice should say', async () => {
   const [page = ''] = await readPdf(await renderPaper(sampleOrder(), tokenOf));
   // 60 pieces at 2.45 are 147.00; to the minimum 33.00; certificates 25.00.

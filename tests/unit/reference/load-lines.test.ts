@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest';
 
 import { groupsOf, type TypedLine } from '@/components/reference/load-lines';
-import { apartWords, unplacedWords } from '@/components/reference/load-words';
+import { apartWords, unplacedWords } from '@/lib/reference/load-words';
 
 const LINE: TypedLine = { name: 'a', alloy: '2024', thicknessMm: 1.6, clad: true, to: 'T42' };
 const WORK = { form: 'sheet', medium: 'air', quench: 'cold water' } as const;

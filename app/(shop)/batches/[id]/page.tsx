@@ -8,6 +8,7 @@ import {
   getBatchChecksEndpoint,
   getBatchEndpoint,
   getBatchLinesEndpoint,
+  getLoadPlanEndpoint,
   getTravellerEndpoint,
   listBatchDocumentsEndpoint,
   listStepProcessorsEndpoint,
@@ -41,7 +42,10 @@ export default async function BatchPage({ params }: Props) {
         ask(getTravellerEndpoint, { batchId }),
         ask(listAuditEndpoint, historyOf('batch', batchId)),
         ...(dispatchedAt === null
-          ? [ask(listStepProcessorsEndpoint, { process, specification: step.specification })]
+          ? [
+              ask(listStepProcessorsEndpoint, { process, specification: step.specification }),
+              ask(getLoadPlanEndpoint, { batchId }),
+            ]
           : sentBatch(batchId)),
       ]}
     >

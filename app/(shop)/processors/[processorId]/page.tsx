@@ -5,6 +5,7 @@ import { ask, Prefetched } from '@/app/_kit/prefetch';
 import { ProcessorScreen } from '@/components/processors/processor-screen';
 import { Id } from '@/lib/api/shapes';
 import { listBatchesEndpoint } from '@/lib/batches/endpoints';
+import { listEquipmentEndpoint } from '@/lib/equipment/endpoints';
 import { getProcessorEndpoint } from '@/lib/processors/endpoints';
 import { getMeEndpoint } from '@/lib/session/endpoints';
 
@@ -17,6 +18,7 @@ export default async function ProcessorPage({ params }: { params: Promise<{ proc
     <Prefetched
       queries={[
         ask(getProcessorEndpoint, { processorId }),
+        ask(listEquipmentEndpoint, { processorId }),
         ask(listBatchesEndpoint, { processorId, limit: 20 }),
         ask(getMeEndpoint, {}),
       ]}

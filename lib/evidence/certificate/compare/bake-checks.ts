@@ -18,7 +18,7 @@ export const isBaked: Check = ({ stated, order, pages }) => {
   const cycles = bakesOf(stated);
   const least = bake.min_hours === undefined ? '' : ` ${bake.min_hours} h`;
   const asked = { requirement: `bake${least} after plating`, ordered: `bake${least}` };
-  if (cycles.length === 0 && speaksOf(NAMES, [bake.set_f, bake.min_hours ?? NaN], pages))
+  if (cycles.length === 0 && speaksOf(NAMES, [bake.set_f ?? NaN, bake.min_hours ?? NaN], pages))
     return [cannotTell(asked, 'The page speaks of a bake that could not be read.')];
   if (cycles.length === 0)
     return [
@@ -29,7 +29,9 @@ export const isBaked: Check = ({ stated, order, pages }) => {
       ),
     ];
   return [
-    ...temperatureOutcomes('bake', bake, cycles),
+    ...(bake.set_f === undefined
+      ? []
+      : temperatureOutcomes('bake', { set_f: bake.set_f, tolerance_f: bake.tolerance_f ?? 0 }, cycles)),
     ...(bake.min_hours === undefined
       ? []
       : soakOutcomes('bake', { min: bake.min_hours * 60 }, cycles, {

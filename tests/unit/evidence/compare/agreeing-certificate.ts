@@ -121,7 +121,7 @@ export function agreeing(order: Order): StatedCertificate {
         : []),
       ...(asked.age ? [cycle(`${asked.age.kind}_age`, { minutes: (asked.age.min_hours ?? 0) * 60 })] : []),
       ...(asked.bake
-        ? [cycle('embrittlement_relief', { set_temp: asked.bake.set_f, unit: 'F' as const })]
+        ? [cycle('embrittlement_relief', { set_temp: asked.bake.set_f ?? null, unit: 'F' as const })]
         : []),
     ],
     quench_medium: asked.quench?.medium ?? null,

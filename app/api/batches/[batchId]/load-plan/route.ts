@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { getLoadPlanEndpoint } from '@/lib/batches/endpoints';
+
+export const GET = serve(getLoadPlanEndpoint);

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { getCertificateReadingEndpoint } from '@/lib/readings/endpoints';
+
+export const GET = serve(getCertificateReadingEndpoint);

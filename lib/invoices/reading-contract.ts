@@ -1,0 +1,42 @@
+import { z } from 'zod';
+
+import { declare } from '@/lib/api/endpoint';
+import { Id } from '@/lib/api/shapes';
+import { InvoiceDiscrepancy } from '@/lib/evidence/invoice/invoice';
+import { READING_STATES } from '@/lib/readings/reading-state';
+
+import { INVOICE_LINE_KINDS } from './contract';
+
+/** What the machine read on an invoice, in the form it is entered in. The office enters; this only saves the typing. */
+export const InvoiceReading = z.object({
+  state: z.enum(READING_STATES).nullable(),
+  fault: z.string().nullable(),
+  number: z.string().nullable(),
+  datedOn: z.string().nullable(),
+  dueOn: z.string().nullable(),
+  currency: z.string().nullable(),
+  totalMinor: z.int().nullable(),
+  lines: z.array(
+    z.object({
+      kind: z.enum(INVOICE_LINE_KINDS),
+      lineId: Id.nullable(),
+      description: z.string(),
+      pieces: z.int().nullable(),
+      unitPriceMinor: z.int().nullable(),
+      amountMinor: z.int().nullable(),
+    }),
+  ),
+  discrepancies: z.array(InvoiceDiscrepancy),
+});
+export type InvoiceReading = z.output<typeof InvoiceReading>;
+
+export const getInvoiceReading = declare({
+  id: 'getInvoiceReading',
+  method: 'get',
+  path: '/invoices/{invoiceId}/reading',
+  summary: 'What the machine read on an invoice',
+  side: 'shop',
+  permission: 'invoice.read',
+  input: z.object({ invoiceId: Id }),
+  response: InvoiceReading,
+});

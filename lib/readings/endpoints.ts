@@ -1,0 +1,17 @@
+import { endpoint } from '@/lib/api/endpoint';
+
+import * as contract from './contract';
+import { correctReading } from './correct-reading';
+import { getCertificateReading } from './get-certificate-reading';
+import * as intakeContract from './intake-contract';
+import { listIntake } from './list-intake';
+import { readCertificateAgain } from './read-certificate-again';
+import { addToIntake, assignIntake, setAsideIntake } from './settle-intake';
+
+export const getCertificateReadingEndpoint = endpoint(contract.getCertificateReading, getCertificateReading);
+export const readCertificateAgainEndpoint = endpoint(contract.readCertificateAgain, readCertificateAgain);
+export const correctReadingEndpoint = endpoint(contract.correctReading, correctReading);
+export const listIntakeEndpoint = endpoint(intakeContract.listIntake, listIntake);
+export const addToIntakeEndpoint = endpoint(intakeContract.addToIntake, addToIntake);
+export const assignIntakeEndpoint = endpoint(intakeContract.assignIntake, assignIntake);
+export const setAsideIntakeEndpoint = endpoint(intakeContract.setAsideIntake, setAsideIntake);

@@ -1,0 +1,236 @@
+import type {
+  Discrepancy,
+  RequirementVerdict,
+  SeenCertificate,
+  StatedCertificate,
+} from '@/lib/evidence/certificate/certificate';
+import { compare } from '@/lib/evidence/certificate/compare/compare';
+import type { Fact } from '@/lib/evidence/fact';
+import type { Order, Requirements } from '@/lib/evidence/order';
+import type { OpenedFile } from '@/lib/evidence/page';
+import type { Verdict } from '@/lib/certificates/verdict';
+
+import { qualityOf } from './quality';
+import type { AskedRequirement, BatchOrder } from './orders-of-batch';
+
+/** What the machine would write for one requirement. A person decides. */
+export interface Proposal {
+  requirementId: string;
+  stated: string;
+  verdict: Verdict;
+  why: string;
+  /** The facts it rests on, by their place in the reading. */
+  facts: number[];
+  /** Of the weakest fact it rests on; null where it rests on none. */
+  confidence: number | null;
+}
+
+/** What it would write for a line's pieces. */
+export interface LineProposal {
+  lineNo: number;
+  pieces: number;
+  facts: number[];
+}
+
+export interface Proposed {
+  proposals: Proposal[];
+  lines: LineProposal[];
+  discrepancies: Discrepancy[];
+  observations: string[];
+}
+
+interface Compared {
+  stated: StatedCertificate;
+  file: Pick<OpenedFile, 'sha256' | 'recognised' | 'pages'>;
+  others: readonly StatedCertificate[];
+  seen: readonly SeenCertificate[];
+  /** `YYYY-MM-DD` */
+  today: string;
+}
+
+const VERDICT = {
+  meets: 'meets',
+  fails: 'does_not_meet',
+  not_stated: 'not_stated',
+  cannot_tell: 'cannot_tell',
+} as const;
+
+/** What every certificate is asked for beside figures: how shops word it, what speaks against it, where it stands. */
+interface PaperForm {
+  characteristic: RegExp;
+  against: RegExp;
+  fields: RegExp;
+}
+
+const PAPERS: readonly PaperForm[] = [
+  {
+    characteristic: /order|revision|part number/i,
+    against: /^(wrong_po|wrong_batch|part_number_|revision_mismatch)/,
+    fields: /^purchase_order$|^lines\[own\]\.(part_number|rev)$/,
+  },
+  {
+    characteristic: /signature|signed/i,
+    against: /^signature_missing$/,
+    fields: /^(signature_present|signed_by|signer_title|certificate_date)$/,
+  },
+  {
+    characteristic: /conformance|statement/i,
+    against: /^statement_missing$/,
+    fields: /^conformance_statement$/,
+  },
+];
+
+/** What must be found for each word that a requirement says; the other fields are only pointed at. */
+const NEEDED: readonly (readonly [RegExp, RegExp])[] = [
+  [/order/i, /^purchase_order$/],
+  [/revision/i, /^lines\[own\]\.rev$/],
+  [/part number/i, /^lines\[own\]\.part_number$/],
+  [/sign/i, /^signature_present$/],
+  [/\bdated?\b/i, /^certificate_date$/],
+  [/conformance|statement/i, /^conformance_statement$/],
+];
+
+/**
+ * Compares a certificate with its batch and says what it would write for each requirement and line.
+ *
+ * Each requirement is compared by itself: two may ask for different figures of the same thing, one of the whole batch
+ * and one of a line, and each has its own answer.
+ */
+export function propose({ order, requirements }: BatchOrder, compared: Compared): Proposed {
+  const against = (asked: Requirements) => compare({ ...compared, order: { ...order, requirements: asked } });
+  const unasked = against({});
+  const answers = requirements.map((requirement) => ({
+    requirement,
+    answer: requirement.figures && against(requirement.figures.asked),
+  }));
+  const outcomes = [unasked, ...answers.flatMap(({ answer }) => answer ?? [])];
+  const discrepancies = unique(outcomes.flatMap((outcome) => outcome.discrepancies));
+  const facts = compared.stated.facts.map((fact) => ({ ...fact, field: named(fact.field, compared.stated) }));
+  return {
+    proposals: answers.flatMap(({ requirement, answer }) =>
+      answer && requirement.figures
+        ? figureProposal(requirement.id, {
+            verdicts: beyond(unasked.verdicts, answer.verdicts),
+            facts,
+            own: placesOf(facts, requirement.figures.fields),
+          })
+        : paperProposal(requirement, discrepancies, ownLines(facts, order, requirement.lineNo)),
+    ),
+    lines: order.lines.flatMap((line) => lineProposal(line, compared.stated)),
+    discrepancies,
+    observations: [...new Set(outcomes.flatMap((outcome) => outcome.observations))],
+  };
+}
+
+/** The verdicts that a requirement adds to those that every certificate of the order gets. */
+function beyond(usual: readonly RequirementVerdict[], all: readonly RequirementVerdict[]) {
+  const keyOf = ({ requirement, line }: RequirementVerdict) => `${requirement} ${line}`;
+  const known = new Set(usual.map(keyOf));
+  return all.filter((one) => !known.has(keyOf(one)));
+}
+
+/** The worst first: a step is met when its temperature and its time are, and so is each of its cycles. */
+const WORST_FIRST = ['fails', 'cannot_tell', 'not_stated', 'meets'] as const;
+
+function figureProposal(
+  requirementId: string,
+  { verdicts, facts, own }: { verdicts: RequirementVerdict[]; facts: readonly Fact[]; own: number[] },
+): Proposal[] {
+  const worst = verdicts.toSorted(
+    (one, other) => WORST_FIRST.indexOf(one.verdict) - WORST_FIRST.indexOf(other.verdict),
+  )[0];
+  if (!worst) return [];
+  return [
+    asWellAsRead({
+      requirementId,
+      stated: [...new Set(verdicts.flatMap(({ stated }) => stated ?? []))].join(', '),
+      verdict: VERDICT[worst.verdict],
+      why: worst.why,
+      facts: own,
+      confidence: weakest(facts, own),
+    }),
+  ];
+}
+
+function paperProposal(
+  { id, characteristic }: AskedRequirement,
+  discrepancies: readonly Discrepancy[],
+  facts: readonly Fact[],
+): Proposal[] {
+  const paper = PAPERS.find((one) => one.characteristic.test(characteristic));
+  if (!paper) return [];
+  const against = discrepancies.find(({ code }) => paper.against.test(code));
+  const needed = NEEDED.filter(([word]) => word.test(characteristic)).map(([, field]) =>
+    placesOf(facts, field),
+  );
+  const unlessMissing = needed.every((places) => places.length > 0) ? 'meets' : 'not_stated';
+  const own = placesOf(facts, paper.fields);
+  const says = own.map((at) => facts[at]?.value).filter((value) => typeof value === 'string');
+  return [
+    asWellAsRead({
+      requirementId: id,
+      stated: [...new Set(says)].join(', '),
+      verdict: against ? 'does_not_meet' : unlessMissing,
+      why: against?.message ?? '',
+      facts: own,
+      confidence: weakest(facts, needed.flat()),
+    }),
+  ];
+}
+
+/** The facts with the lines that are of this line of the order named so; of the whole batch all are. */
+function ownLines(facts: readonly Fact[], { lines }: Order, lineNo: number | null): Fact[] {
+  const part = lines.find(({ line }) => line === lineNo)?.part_number;
+  const own = new Set(
+    facts.flatMap(({ field, value }) => {
+      const at = /^lines\[(\d+)\]\.part_number$/.exec(field)?.[1];
+      return at !== undefined && (part === undefined || value === part) ? [at] : [];
+    }),
+  );
+  return facts.map((fact) => ({
+    ...fact,
+    field: fact.field.replace(/^lines\[(\d+)\]/, (counted, at: string) =>
+      own.has(at) ? 'lines[own]' : counted,
+    ),
+  }));
+}
+
+/** What was read poorly is never proposed as met. */
+const asWellAsRead = (proposal: Proposal): Proposal =>
+  proposal.verdict === 'meets' && proposal.confidence !== null && qualityOf(proposal.confidence) === 1
+    ? { ...proposal, verdict: 'cannot_tell', why: 'It was read poorly. Look at the page.' }
+    : proposal;
+
+function lineProposal(line: Order['lines'][number], stated: StatedCertificate): LineProposal[] {
+  const at = stated.lines.findIndex(({ part_number }) => part_number === line.part_number);
+  const pieces = stated.lines[at]?.qty_accepted;
+  if (pieces == null) return [];
+  return [
+    {
+      lineNo: line.line,
+      pieces,
+      facts: placesOf(stated.facts, new RegExp(`^lines\\[${at}\\]\\.(part_number|qty_accepted)$`)),
+    },
+  ];
+}
+
+/** A field with its cycle or reading named by step or kind instead of counted. */
+function named(field: string, { cycles, readings }: StatedCertificate): string {
+  return field
+    .replace(/^cycles\[(\d+)\]/, (counted, at: string) => `cycles[${cycles[Number(at)]?.step ?? counted}]`)
+    .replace(
+      /^readings\[(\d+)\]/,
+      (counted, at: string) => `readings[${readings[Number(at)]?.kind ?? counted}]`,
+    );
+}
+
+const placesOf = (facts: readonly Fact[], fields: RegExp): number[] =>
+  facts.flatMap(({ field }, at) => (fields.test(field) ? [at] : []));
+
+const weakest = (facts: readonly Fact[], places: readonly number[]): number | null =>
+  places.length === 0 ? null : Math.min(...places.map((at) => facts[at]?.confidence ?? 0));
+
+function unique(discrepancies: readonly Discrepancy[]): Discrepancy[] {
+  const keys = discrepancies.map((one) => `${one.code} ${one.line} ${one.message}`);
+  return discrepancies.filter((_, at) => keys.indexOf(keys[at] ?? '') === at);
+}

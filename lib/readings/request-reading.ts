@@ -1,0 +1,32 @@
+import { eq } from 'drizzle-orm';
+
+import { readings } from '@/db/schema/readings';
+import { shopOf, type Ctx } from '@/lib/auth/context';
+import { enqueue } from '@/lib/jobs/queue';
+import { newId } from '@/lib/ids';
+
+import { readDocumentQueue, type ChartAsk } from './read-document-queue';
+import type { ReadingKind } from './reading-state';
+
+/** Has a verified file read by the worker, in the transaction that took it in. */
+export async function requestReading(
+  ctx: Ctx,
+  { fileId, kind, ask }: { fileId: string; kind: ReadingKind; ask?: ChartAsk },
+): Promise<void> {
+  const readingId = newId();
+  const [made] = await ctx.tx
+    .insert(readings)
+    .values({ id: readingId, shopId: shopOf(ctx), fileId, kind, createdAt: ctx.now })
+    .onConflictDoNothing({ target: readings.fileId })
+    .returning({ id: readings.id });
+  if (made) await enqueue(ctx, readDocumentQueue, { shopId: shopOf(ctx), readingId, ...(ask && { ask }) });
+}
+
+/** Has it read once more: after the reader learned something, or because the first time it took too long. */
+export async function readOnceMore(ctx: Ctx, readingId: string, ask?: ChartAsk): Promise<void> {
+  await ctx.tx
+    .update(readings)
+    .set({ state: 'waiting', faultCode: null, fault: null })
+    .where(eq(readings.id, readingId));
+  await enqueue(ctx, readDocumentQueue, { shopId: shopOf(ctx), readingId, ...(ask && { ask }) });
+}
