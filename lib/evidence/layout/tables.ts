@@ -43,7 +43,11 @@ export function tablesOf<Heading>(lines: readonly Line[], reader: HeadingReader<
   const tables: Table<Heading>[] = [];
   let at = 0;
   while (at < lines.length) {
-    const heading = headingAt(lines, at, reader);
+    const found = headingAt(lines, at, reader);
+    const heading = found && {
+      ...found,
+      columns: withRowHeads(lines.slice(at + found.height, at + found.height + 8), found.columns),
+    };
     const table = heading && tableUnder(lines, at, heading, reader);
     if (table) tables.push(table);
     at = table ? Math.max(at + 1, table.to) : at + 1;
@@ -87,6 +91,21 @@ function headingAt<Heading>(
 
 const isUnderHeading = ({ box }: Segment, columns: readonly Column<unknown>[]): boolean =>
   columns.some((column) => column.heading !== null && sharedAcross(column.box, box) > 0);
+
+/** Rows may begin with words of their own left of all headings: a column without a heading. */
+function withRowHeads<Heading>(
+  rows: readonly Line[],
+  columns: readonly Column<Heading>[],
+): readonly Column<Heading>[] {
+  const [first] = columns;
+  const heads: Box[] = [];
+  for (const { segments } of rows) {
+    const [head] = segments;
+    if (!first || !head || segments.length < 3 || head.box[2] > first.box[0] - heightOf(head.box)) break;
+    heads.push(head.box);
+  }
+  return heads.length === 0 ? columns : [{ text: '', box: boxAround(heads), heading: null }, ...columns];
+}
 
 /** Segments that stand above one another are one cell of the heading. */
 function columnsOf(lines: readonly Line[]): { text: string; box: Box }[] {
@@ -168,7 +187,8 @@ function endsAt<Heading>(
   // Nothing but labels: the next row of a form whose values stand below.
   if (line.segments.every(({ text }) => text.length > 2 && reader.read(text) !== null)) return true;
   // A label with its value under a table of more columns is a field of its own.
-  if (only && second && !third && columns.length >= 4 && reader.read(only.text) !== null) return true;
+  const isField = columns.length >= 4 || /^\d{1,2}[.)]\s/.test(only?.text ?? '');
+  if (only && second && !third && isField && reader.read(only.text) !== null) return true;
   // A sentence under the table, which runs through its columns.
   const crossed = only
     ? columns.filter(({ box }) => centreOf(box) > only.box[0] && centreOf(box) < only.box[2])

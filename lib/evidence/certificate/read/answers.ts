@@ -142,9 +142,11 @@ function byColumn({ table, row, name, order, section }: RowPlace): Answer[] {
   return table.columns.flatMap(({ heading }, index): Answer[] => {
     const cell = row.cells[index];
     if (!heading || !cell || ASIDE.has(heading.key)) return [];
+    // What was found of a step is how long it took.
+    const key = heading.key === 'result' && named ? 'minutes' : heading.key;
     return [
       {
-        key: heading.key,
+        key,
         words: heading.words,
         also: heading.also,
         qualifier: `${heading.qualifier} ${aside}`.trim(),

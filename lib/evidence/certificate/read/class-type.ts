@@ -104,7 +104,11 @@ const ENGLISH: Readonly<Record<string, string>> = {
   méthode: 'Method',
 };
 function english(name: string): string {
-  const plain = name.toLowerCase().replace(/\.$/, '');
+  const plain = name
+    .toLowerCase()
+    .replace(/\.$/, '')
+    .replace(/^sensitivity(?: level)?$/, 'level');
+  if (plain === 'sc') return 'SC';
   return ENGLISH[plain] ?? plain.charAt(0).toUpperCase() + plain.slice(1);
 }
 const roman = (numeral: string): string =>

@@ -44,7 +44,8 @@ export function cycleAttributesIn(
   const temperature = temperatureOf(passage, sign, asked, qualifier);
   const duration = durationOf(passage, sign, asked, qualifier);
   const moments = momentsIn(text, asked !== null && TIME_KEYS.has(asked)).filter(
-    ({ time, day }) => time !== null || day !== null,
+    ({ time, day, start: place }) =>
+      (time !== null || day !== null) && !(asked !== 'plating_end' && PLATED_THEN.test(text.slice(0, place))),
   );
   const timed = moments.filter(({ time }) => time !== null);
   const first = timed[0] ?? (asked !== null && TIME_KEYS.has(asked) ? moments[0] : undefined);
@@ -65,6 +66,9 @@ export function cycleAttributesIn(
     ...(end && { end }),
   };
 }
+
+/** The time before which the plating ended is none of the bake's. */
+const PLATED_THEN = /\bplat(?:ing|ed)\b[^,;.]{0,24}$/i;
 
 const START_KEYS: ReadonlySet<LabelKey> = new Set(['time_in', 'bake_start']);
 const END_KEYS: ReadonlySet<LabelKey> = new Set(['time_out', 'bake_end', 'plating_end']);

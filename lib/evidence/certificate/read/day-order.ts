@@ -1,4 +1,4 @@
-import { daysIn, type DayOrder } from './dates';
+import { dayOf, daysIn, type DayOrder } from './dates';
 import type { DecimalSign } from './quantities';
 import type { Sheet } from './sheet';
 
@@ -10,6 +10,9 @@ const AMERICAN = [
   /\(\d{3}\)\s?\d{3}-\d{4}|\b\d{3}[-.]\d{3}[-.]\d{4}\b/,
   /\b(?:aluminum|center|color|authorized)\b/i,
   /\bU\.?S\.?A\.?\b/,
+  /\d\s?F\b(?!\s*\d)/,
+  /\b\d{1,2}:\d\d\s?[AP]M\b/,
+  /\d\s+in\b(?!\s+\w)|\b\d+\s?lbs?\b/i,
   /\b(?:mils?|microinch(?:es)?|ksi)\b/i,
 ];
 const EUROPEAN = [
@@ -40,6 +43,8 @@ export function dayOrderOf(text: string, sheets: readonly Sheet[], decimal: Deci
   const certain = count('day_first', false) - count('month_first', false);
   if (certain !== 0) return certain > 0 ? 'day_first' : 'month_first';
   if (count('day_first', false) > 0) return null;
+  const close = closerTogether(text);
+  if (close) return close;
   const hits = (signs: readonly RegExp[]): number => signs.filter((sign) => sign.test(text)).length;
   const a4 = sheets.filter(({ width, height }) => Math.abs(Math.max(width, height) - 842) < 4).length;
   const letter = sheets.filter(({ width, height }) => Math.abs(Math.max(width, height) - 792) < 4).length;
@@ -50,4 +55,25 @@ export function dayOrderOf(text: string, sheets: readonly Sheet[], decimal: Deci
   // Clear means twice as much, not a majority of one.
   if (Math.max(european, american) < 2 * Math.min(european, american)) return null;
   return european > american ? 'day_first' : 'month_first';
+}
+
+const DAY_MS = 86_400_000;
+
+/**
+ * The order in which the days of the document lie together, as the days of one job do: within a month, when in the other
+ * order they would lie over more than two.
+ */
+function closerTogether(text: string): DayOrder | null {
+  const days = daysIn(text);
+  const span = (order: DayOrder): number => {
+    const times = days.flatMap((day) => {
+      const iso = dayOf(day, order);
+      return iso === null ? [] : [Date.parse(iso) / DAY_MS];
+    });
+    return Math.max(...times) - Math.min(...times);
+  };
+  if (days.length < 2) return null;
+  const [dayFirst, monthFirst] = [span('day_first'), span('month_first')];
+  if (monthFirst <= 31 && dayFirst > 62) return 'month_first';
+  return dayFirst <= 31 && monthFirst > 62 ? 'day_first' : null;
 }

@@ -27,6 +27,10 @@ export const CERTIFICATE_NUMBER: CodeField = {
       'giu',
     ),
     new RegExp(
+      String.raw`\b(?:certificate|certification|certificat|report|zeugnis)\b[^.:;\d]{0,50}\bno\.?\s*:?\s*${CODE}`,
+      'giu',
+    ),
+    new RegExp(
       String.raw`\b(?:certificate|certification|cert|coc)\.?\s+((?=[A-Z0-9./-]*\d)[A-Z]{1,5}-?[A-Z0-9./-]+|\d{2}-\d{3,}|\d{4,})`,
       'giu',
     ),

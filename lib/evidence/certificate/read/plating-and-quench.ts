@@ -10,7 +10,7 @@ import { durationsIn, numberFrom } from './quantities';
 import { localMinute, workDaysOf } from './work-days';
 
 const PLATED =
-  /(?:plating|plate|platt\w*|cadmiage|zingage|beschichtung|d[eé]p[oô]t)\s+(?:was\s+)?(?:\w+\s+)?(?:complet\w+|finish\w*|end\w*|stopp?\w*|out|termin\w*|beendet)|out of (?:the\s+)?plating(?:\s+\w+)?|removed from (?:the\s+)?(?:plating|tank|bath)(?:\s+\w+)?|plated (?:at|on|:)|(?:cadmium|zinc)\s+plated/iu;
+  /(?:plating|plate|platt\w*|cadmiage|zingage|beschichtung|d[eé]p[oô]t)\s+(?:was\s+)?(?:\w+\s+)?(?:complet\w+|finish\w*|end\w*|stopp?\w*|out|termin\w*|beendet)|out of (?:the\s+)?plating(?:\s+(?:tank|bath|line|solution))?|removed from (?:the\s+)?(?:plating|tank|bath)(?:\s+(?:tank|bath|line|solution))?|plated (?:at|on|:)|(?:cadmium|zinc)\s+plated/iu;
 
 /** When the parts came out of the plating bath. */
 export function platingEnds(paper: Paper): Candidate<string>[] {

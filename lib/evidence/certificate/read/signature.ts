@@ -14,7 +14,7 @@ export interface ReadSignature {
 }
 
 const SIGNED_IN_WORDS =
-  /(?:^|\s)\/\s?s\s?\/|(?:electronically|digitally|elektronisch|num[eé]riquement)\s+(?:signed|approved|authenticated|certified|unterzeichnet|unterschrieben|sign[eé]e?)|\be-?signed\b|(?:signed|approved|signature)\s+(?:electronically|digitally)|electronic signature\s*(?:of|by|:)\s*\p{L}/iu;
+  /(?:^|\s)\/\s?s\s?\/|(?:^|\s)gez\.\s+\p{Lu}|(?:electronically|digitally|elektronisch|num[eé]riquement)\s+(?:signed|approved|authenticated|certified|unterzeichnet|unterschrieben|sign[eé]e?)|\be-?signed\b|(?:signed|approved|signature)\s+(?:electronically|digitally)|electronic signature\s*(?:of|by|:)\s*\p{L}/iu;
 const UNSIGNED =
   /not\s+(?:electronically\s+)?signed|signature not required|valid without (?:a )?signature|ohne unterschrift g[uü]ltig/iu;
 

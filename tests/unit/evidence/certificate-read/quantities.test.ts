@@ -37,8 +37,7 @@ test.each([
   ['1h30', 90],
 ])('%s are %f minutes', (written, minutes) => expect(durationsIn(written, '.')[0]?.value).toBe(minutes));
 
-test('a part number is no duration', () =>
-  expect(durationsIn('P/N 4h-200, 10-200', '.')).toEqual([]));
+test('a part number is no duration', () => expect(durationsIn('P/N 4h-200, 10-200', '.')).toEqual([]));
 
 test('who writes days with full stops and decimals with a comma means a comma', () => {
   expect(decimalSignOf('05.03.2026 Härte 33,4 HRC, 4130 BAR 1.00 DIA')).toBe(',');

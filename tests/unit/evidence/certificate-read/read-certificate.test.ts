@@ -176,6 +176,56 @@ test('sentences of a mail give lines, cycles and readings', () => {
   });
 });
 
+test('rows may begin with their step, beside what was required', () => {
+  const stated = read([
+    'OXBOW HEAT TREATING CO.',
+    'CERTIFICATION OF HEAT TREATMENT                         No. 55210',
+    'Sold to: Lowell Rotor Works           Date: Mar 12, 2026',
+    '',
+    'HEAT TREATED TO T62 PER AMS 2770 REV. R',
+    "                     TEMP       IN                 OUT              REQ'D      ACTUAL",
+    'SOLUTION             900F       3/5/26 0910        3/5/26 0952      35 MIN     42 MIN',
+    'AGE                  250F       3/5/26 1400        3/6/26 1400      23 HR      24 HR',
+    '',
+    "HARDNESS REQ'D: 84 HRB MIN     HARDNESS FOUND: 86, 87, 88 HRB",
+  ]);
+  expect(stated).toMatchObject({
+    processor: 'OXBOW HEAT TREATING CO.',
+    certificate_number: '55210',
+    certificate_date: '2026-03-12',
+    cycles: [
+      {
+        step: 'solution',
+        set_temp: 900,
+        soak_start: '2026-03-05T09:10',
+        soak_end: '2026-03-05T09:52',
+        minutes: 42,
+      },
+      {
+        step: 'artificial_age',
+        set_temp: 250,
+        soak_start: '2026-03-05T14:00',
+        soak_end: '2026-03-06T14:00',
+        minutes: 1440,
+      },
+    ],
+    readings: [{ kind: 'hardness', unit: 'HRB', values: [86, 87, 88] }],
+  });
+});
+
+test('the times of a bake are not those of the plating before it', () => {
+  const stated = read([
+    'Process: Zinc plate per ASTM B633-19 Type II, SC 3',
+    'Bake: 375 F for 23 hours. Out of plating 3/6/26 2:10 PM, in oven 3/6/26 4:00 PM, out of oven 3/7/26 3:30 PM.',
+  ]);
+  expect(stated).toMatchObject({
+    class_type: 'Type II SC 3',
+    plating_end: '2026-03-06T14:10',
+    bake_start: '2026-03-06T16:00',
+    bake_end: '2026-03-07T15:30',
+  });
+});
+
 test('a page with a number of its own is another certificate, one without goes with the page before', () => {
   const second = HEAD.map((line) => line.replace('C-881', 'C-882'));
   const file = fileOf(
