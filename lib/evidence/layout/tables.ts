@@ -29,7 +29,7 @@ export interface HeadingReader<Heading> {
   /** What the words of a whole cell ask for, null where they are no heading. */
   readonly read: (text: string) => Heading | null;
   /** Whether such a line is a heading at all: a label beside its value is none. */
-  readonly holds: (headings: readonly (Heading | null)[]) => boolean;
+  readonly holds?: (headings: readonly (Heading | null)[]) => boolean;
   /** Whether a line of the page can be no row of a table: it begins with a label and its colon. */
   readonly endsTable: (segment: Segment) => boolean;
   /** The column whose cells begin a row; a line without it continues the row above. */
@@ -78,7 +78,11 @@ function headingAt<Heading>(
       break;
     const columns = columnsOf(used).map((column) => ({ ...column, heading: reader.read(column.text) }));
     const known = columns.filter(({ heading }) => heading !== null).length;
-    if (known < 2 || known < 0.6 * columns.length || !reader.holds(columns.map(({ heading }) => heading)))
+    if (
+      known < 2 ||
+      known < 0.6 * columns.length ||
+      reader.holds?.(columns.map(({ heading }) => heading)) === false
+    )
       continue;
     // A second line that is a part of headings leaves them headings; a row of values would not.
     const isPart =

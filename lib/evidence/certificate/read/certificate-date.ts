@@ -18,6 +18,17 @@ const ANOTHER =
  * Days that may be the certificate's. The value is null where the day is written so that it cannot be told from another.
  */
 export function certificateDates(paper: Paper): Candidate<string | null>[] {
+  const found = candidatesOn(paper);
+  return found.map((one) => (isLikelyOnly(paper, one.spot.raw) ? { ...one, trust: one.trust * 0.6 } : one));
+}
+
+/** It could be another day in the other order, and no day of the document shows which is meant. */
+function isLikelyOnly({ isDayOrderShown }: Paper, raw: string): boolean {
+  const [day] = daysIn(raw);
+  return !isDayOrderShown && day?.dayFirst !== day?.monthFirst && day?.shows === null;
+}
+
+function candidatesOn(paper: Paper): Candidate<string | null>[] {
   const asked = paper.answers.flatMap((answer) => fromAnswer(paper, answer));
   if (asked.some(({ trust }) => trust > 0.6)) return asked;
   return [...asked, ...standingAlone(paper)];
@@ -25,16 +36,21 @@ export function certificateDates(paper: Paper): Candidate<string | null>[] {
 
 function fromAnswer(paper: Paper, answer: Answer): Candidate<string | null>[] {
   const weight = WEIGHT[answer.key];
-  if (weight === undefined || answer.step || answer.section) return [];
+  if (weight === undefined || (answer.key === 'date' && answer.step)) return [];
   for (const { passage, how } of answer.values) {
     const [found] = daysIn(passage.text);
     const spot = found && spotIn(passage, found.start, found.end);
     if (!found || !spot) continue;
     // Far behind the label it answers something else.
     if (found.start > 24) continue;
-    const stamp = answer.key === 'date' && belongsToSignature(paper, answer) ? 0.6 : 1;
+    const beside = answer.key === 'date' && belongsToSignature(paper, answer);
+    const stamp = beside ? 0.6 : 1;
+    // In the part of the form that tells of a step it may be the day of the work.
+    const inStep = answer.key === 'date' && answer.section !== null && !beside ? 0.5 : 1;
     const inTable = answer.row && answer.key === 'date' && isWorkRow(paper, answer) ? 0.3 : 1;
-    return [{ value: dayOf(found, paper.dayOrder), spot, trust: TRUST[how] * weight * stamp * inTable }];
+    return [
+      { value: dayOf(found, paper.dayOrder), spot, trust: TRUST[how] * weight * stamp * inTable * inStep },
+    ];
   }
   return [];
 }

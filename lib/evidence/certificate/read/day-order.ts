@@ -25,15 +25,21 @@ const EUROPEAN = [
   /[äöüßéèàçñ]/i,
 ];
 
+/** The order, and whether the days themselves show it; else it follows from where the document seems to come from. */
+export interface DecidedOrder {
+  readonly order: DayOrder | null;
+  readonly isShown: boolean;
+}
+
 /**
  * Whether days in figures have the day or the month first.
  *
  * A day that can be read in one way only decides; without one, what else shows where the document comes from, when it
  * speaks for one side clearly.
  *
- * @returns null where nothing tells.
+ * @returns an order of null where nothing tells.
  */
-export function dayOrderOf(text: string, sheets: readonly Sheet[], decimal: DecimalSign): DayOrder | null {
+export function dayOrderOf(text: string, sheets: readonly Sheet[], decimal: DecimalSign): DecidedOrder {
   const shown = daysIn(text).map(({ shows, dayFirst, monthFirst }) => ({
     shows,
     named: dayFirst === monthFirst,
@@ -41,20 +47,22 @@ export function dayOrderOf(text: string, sheets: readonly Sheet[], decimal: Deci
   const count = (order: DayOrder, named: boolean): number =>
     shown.filter((day) => day.shows === order && day.named === named).length;
   const certain = count('day_first', false) - count('month_first', false);
-  if (certain !== 0) return certain > 0 ? 'day_first' : 'month_first';
-  if (count('day_first', false) > 0) return null;
+  if (certain !== 0) return { order: certain > 0 ? 'day_first' : 'month_first', isShown: true };
+  if (count('day_first', false) > 0) return { order: null, isShown: false };
   const close = closerTogether(text);
-  if (close) return close;
+  if (close) return { order: close, isShown: true };
   const hits = (signs: readonly RegExp[]): number => signs.filter((sign) => sign.test(text)).length;
   const a4 = sheets.filter(({ width, height }) => Math.abs(Math.max(width, height) - 842) < 4).length;
   const letter = sheets.filter(({ width, height }) => Math.abs(Math.max(width, height) - 792) < 4).length;
   const european =
     hits(EUROPEAN) + (decimal === ',' ? 2 : 0) + (a4 > 0 ? 1 : 0) + Math.min(1, count('day_first', true));
   const american = hits(AMERICAN) + (letter > 0 ? 1 : 0) + 2 * Math.min(1, count('month_first', true));
-  if (european === american || Math.max(european, american) < 2) return null;
-  // Clear means twice as much, not a majority of one.
-  if (Math.max(european, american) < 2 * Math.min(european, american)) return null;
-  return european > american ? 'day_first' : 'month_first';
+  const clear =
+    Math.max(european, american) >= 2 &&
+    // Clear means twice as much, not a majority of one.
+    Math.max(european, american) >= 2 * Math.min(european, american);
+  const likely = european > american ? 'day_first' : 'month_first';
+  return { order: clear && european !== american ? likely : null, isShown: false };
 }
 
 const DAY_MS = 86_400_000;

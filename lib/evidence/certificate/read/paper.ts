@@ -14,6 +14,8 @@ export interface Paper {
   readonly paragraphs: readonly Passage[];
   readonly text: string;
   readonly dayOrder: DayOrder | null;
+  /** Days that can be read in one way only show it; otherwise it is likely. */
+  readonly isDayOrderShown: boolean;
   readonly decimal: DecimalSign;
 }
 
@@ -22,12 +24,14 @@ export function paperOf(pages: readonly Page[]): Paper {
   const paragraphs = sheets.flatMap((sheet) => sheet.paragraphs);
   const text = paragraphs.map((paragraph) => paragraph.text).join('\n');
   const decimal = decimalSignOf(text);
+  const { order, isShown } = dayOrderOf(text, sheets, decimal);
   return {
     sheets,
     answers: answersOf(sheets),
     paragraphs,
     text,
     decimal,
-    dayOrder: dayOrderOf(text, sheets, decimal),
+    dayOrder: order,
+    isDayOrderShown: isShown,
   };
 }
