@@ -57,7 +57,7 @@ describe('what a file says it is', () => {
     }));
   test('the chooser offers the same kinds', () =>
     expect(acceptedFiles('certificate')).toBe(
-      '.pdf,.png,image/png,.jpg,.jpeg,image/jpeg,.tif,.tiff,image/tiff',
+      '.pdf,.png,image/png,.jpg,.jpeg,image/jpeg,.tif,.tiff,image/tiff,.eml,.txt,.log',
     ));
   test.each([
     [12, '12 bytes'],
