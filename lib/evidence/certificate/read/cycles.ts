@@ -256,11 +256,17 @@ function usualUnit({ text }: Paper, value: number): 'F' | 'C' | null {
   return fahrenheit ? 'F' : 'C';
 }
 
-/** From start to end, where the minutes are not stated. */
+/**
+ * From start to end, where the minutes are not stated, or where a decimal sign got lost on the way through a scanner: ten
+ * times as long as the times are apart.
+ */
 function complete(cycle: ReadCycle): void {
   const { start, end, minutes } = cycle;
-  if (minutes || !start || !end) return;
+  if (!start || !end) return;
   const between = (Date.parse(`${end.value}Z`) - Date.parse(`${start.value}Z`)) / 60_000;
-  if (between > 0)
-    cycle.minutes = { value: between, spot: end.spot, trust: Math.min(start.trust, end.trust) * 0.95 };
+  if (between <= 0) return;
+  const spot = minutes?.spot ?? end.spot;
+  const lost = minutes !== undefined && spot.legible < 1 && Math.abs(minutes.value / between - 10) < 0.05;
+  const trust = Math.min(start.trust, end.trust) * (lost ? 0.7 : 0.95);
+  if (!minutes || lost) cycle.minutes = { value: between, spot, trust };
 }

@@ -41,7 +41,7 @@ export const PURCHASE_ORDER: CodeField = {
   keys: ['purchase_order'],
   said: [
     new RegExp(
-      String.raw`\b(?:p\.?\s?o\.?|purchase order|your order|customer order|order)\s*(?:no\.?|nr\.?|number|#)?\s*:?\s*${CODE}`,
+      String.raw`\b(?:p\.?\s?o\.?|purchase order|your order|customer order|(?<!\b(?:our|works?|shop|sales|job|unser\w*)\s+)order)\s*(?:no\.?|nr\.?|number|#)?\s*:?\s*${CODE}`,
       'giu',
     ),
     /(?<![\p{L}\d])(P\.?O\.?[-#]\s?\d[A-Z0-9-]*)/giu,

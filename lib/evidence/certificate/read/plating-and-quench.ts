@@ -91,7 +91,7 @@ function secondsOf(paper: Paper, passage: Passage, { qualifier, words }: Answer)
     all.find((one) => !isLimit(passage.text, one) && one.value < 10) ??
     (all.length === 1 ? all[0] : undefined);
   if (best) return readingAt(passage, best.start, best.end, Math.round(best.value * 600) / 10);
-  const bare = /^\D{0,3}(\d{1,3}(?:[.,]\d+)?)\s*(?:["”″]|s\w*)?\s*(?:$|[(/,;])/.exec(passage.text);
+  const bare = /^\D{0,3}(\d{1,3}(?:[.,]\d+)?)\s*(?:["”″]|s\w*)?\s*(?:$|[(/])/.exec(passage.text);
   const known =
     /\b(?:s|secs?|seconds?|sek)\b/i.test(`${qualifier} ${words}`) ||
     /["”″]/.test(passage.text) ||

@@ -9,7 +9,7 @@ export interface ReadStatement {
 
 /** Somebody certifies. */
 const CERTIFIES =
-  /\b(?:we|i|this|hereby|undersigned|it is)\b[^.:;]{0,60}\b(?:certif(?:y|ies|ied)|attests?|declares?|confirms?)\b|\bcertif(?:y|ies|ied)\s+(?:that|herewith)\b|\bthis is to certify\b|\bhereby certif\w+|(?:wir|hiermit|es wird)\s[^.:;]{0,60}(?:best[aä]tig\w*|bescheinig\w*|zertifizier\w*)|\b(?:certifions|attestons|certifie|atteste|d[eé]clarons)\b|\b(?:certificamos|certifica|se certifica)\b/iu;
+  /\b(?:we|i|this|hereby|undersigned|it is)\b[^.:;]{0,60}\b(?:certif(?:y|ies|ied)|attests?|declares?|confirms?)\b|\bcertif(?:y|ies|ied)\s+(?:that|herewith)\b|\bthis is to certify\b|\bhereby certif\w+|(?:wir|hiermit|es wird)\s[^.:;]{0,60}(?:best.{1,2}tig\w*|bescheinig\w*|zertifizier\w*)|\b(?:certifions|attestons|certifie|atteste|d[eé]clarons)\b|\b(?:certificamos|certifica|se certifica)\b/iu;
 
 /** What was done conforms. */
 const CONFORMS =
