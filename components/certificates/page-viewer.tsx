@@ -1,6 +1,6 @@
 'use client';
 import dynamic from 'next/dynamic';
-import { useEffect, type ReactNode } from 'react';
+import { useState, type ReactNode } from 'react';
 
 import { Button } from '@/components/ui/button';
 
@@ -31,18 +31,16 @@ interface PageViewerProps {
 
 interface Read extends Omit<PageSpotsProps, 'page'> {
   pages: readonly PageSpotsProps['page'][];
+  /** A page is on the screen: what points at it can find its place. */
+  onDrawn: () => void;
 }
 
 /** A received file, page by page, as large as the room it has. */
 export function PageViewer({ file, title, facts, choice, read }: PageViewerProps) {
-  const paging = usePaging();
+  // A mail or a text has as many pages as its reader made of it; a PDF says itself how many it has.
+  const paging = usePaging(isDrawn(file) ? null : (read?.pages.length ?? null));
   useTurnToLit(paging, read);
   const kept = read?.pages.find(({ number }) => number === paging.page);
-  useEffect(() => {
-    // A mail or a text has as many pages as its reader made of it.
-    if (!isDrawn(file) && read && read.pages.length > 0) paging.setPages(read.pages.length);
-    // eslint-disable-next-line react-hooks/exhaustive-deps -- the setter is the same at every draw
-  }, [file, read?.pages.length]);
   const { element, width } = useElementWidth<HTMLDivElement>();
   const url = `/api/files/${file.id}/content?inline=1`;
   const drawn = Math.max(200, Math.floor((width - 36) * paging.zoom));
@@ -70,6 +68,7 @@ export function PageViewer({ file, title, facts, choice, read }: PageViewerProps
                 upright={kept?.turned ?? null}
                 turned={paging.turned}
                 onPages={paging.setPages}
+                onDrawn={read?.onDrawn}
               />
             )}
             {file.mediaType.startsWith('image/') && (
@@ -80,7 +79,8 @@ export function PageViewer({ file, title, facts, choice, read }: PageViewerProps
                 alt={`The received picture ${file.name}`}
                 width={drawn}
                 style={{ width: drawn, transform: `rotate(${paging.turned + (kept?.turned ?? 0)}deg)` }}
-                className="h-auto max-w-none"
+                className="lw-drawn h-auto max-w-none"
+                onLoad={read?.onDrawn}
               />
             )}
             {!isDrawn(file) &&
@@ -92,7 +92,14 @@ export function PageViewer({ file, title, facts, choice, read }: PageViewerProps
                 </p>
               ))}
             {read && kept && paging.turned === 0 && isDrawnUpright(file, kept) && (
-              <PageSpots {...read} page={kept} />
+              <PageSpots
+                page={kept}
+                spots={read.spots}
+                selected={read.selected}
+                numberOf={read.numberOf}
+                onRow={read.onRow}
+                onWords={read.onWords}
+              />
             )}
           </div>
         </div>
@@ -109,13 +116,14 @@ const isDrawnUpright = (file: ViewedFile, page: PageSpotsProps['page']): boolean
   !file.mediaType.startsWith('image/') || page.turned === 0;
 
 /** The page on which the selected row stands comes up when the row is selected. */
-function useTurnToLit({ page, toPage }: Paging, read: Read | undefined) {
+function useTurnToLit({ toPage }: Paging, read: Read | undefined) {
   const lit = read?.spots.find(({ row }) => row === read.selected)?.page;
-  useEffect(() => {
-    if (lit !== undefined && lit !== page) toPage(lit);
-    // Only when another row is selected: who turns the page by hand stays there.
-    // eslint-disable-next-line react-hooks/exhaustive-deps -- see above
-  }, [read?.selected, lit]);
+  // Only when another row is selected: who turns the page by hand stays there.
+  const selection = `${read?.selected ?? ''} ${lit ?? ''}`;
+  const [turnedFor, setTurnedFor] = useState(selection);
+  if (selection === turnedFor) return;
+  setTurnedFor(selection);
+  if (lit !== undefined) toPage(lit);
 }
 
 function ViewerControls({ paging, choice }: { paging: Paging; choice: ReactNode }) {

@@ -28,9 +28,10 @@ interface PdfPageProps {
   /** Degrees that the person turned it by. */
   turned: number;
   onPages: (pages: number) => void;
+  onDrawn?: (() => void) | undefined;
 }
 
-export function PdfPage({ url, page, width, upright, turned, onPages }: PdfPageProps) {
+export function PdfPage({ url, page, width, upright, turned, onPages, onDrawn }: PdfPageProps) {
   const [own, setOwn] = useState(0);
   const waiting = <p className="p-6 text-quiet">Reading the file</p>;
   const failing = (
@@ -60,6 +61,7 @@ export function PdfPage({ url, page, width, upright, turned, onPages }: PdfPageP
         error={failing}
         renderAnnotationLayer={false}
         renderTextLayer={false}
+        onRenderSuccess={() => onDrawn?.()}
         className="lw-sheet"
       />
     </Document>

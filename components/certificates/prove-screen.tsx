@@ -22,7 +22,7 @@ export function ProveScreen({ certificateId }: { certificateId: string }) {
         <Viewed proving={proving} />
       </div>
       <ProvePanel proving={proving} />
-      <Thread row={proving.selected} />
+      <Thread row={proving.selected} drawn={proving.reading.drawn} />
     </div>
   );
 }
@@ -74,6 +74,7 @@ function Viewed({ proving }: { proving: Proving }) {
   );
   const read = {
     pages: reading.data?.pages ?? [],
+    onDrawn: reading.onDrawn,
     spots: spotsOf(reading.data, { ...data, selected }),
     selected,
     numberOf: (row: string) => proving.rows.indexOf(row) + 1,

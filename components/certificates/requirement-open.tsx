@@ -104,14 +104,14 @@ function SourceWords({ requirement }: { requirement: ProvedRequirement }) {
 
 /** Why it is proposed, with the spot itself as large as it can be read. */
 function WhatWasRead({ requirementId, proving }: { requirementId: string; proving: Proving }) {
-  const { data, proposalOf } = proving.reading;
+  const { data, proposalOf, drawn } = proving.reading;
   const proposal = proposalOf(requirementId);
   if (!data || !proposal) return null;
   const fact = data.facts[proposal.facts[0] ?? -1];
   const page = data.pages.find(({ number }) => number === fact?.page);
   return (
     <div className="flex flex-wrap items-center gap-4">
-      {fact && page && <SpotPicture fact={fact} page={page} />}
+      {fact && page && <SpotPicture fact={fact} page={page} drawn={drawn} />}
       <p className="min-w-48 flex-1 text-second">
         <strong>{proposal.stated || 'Nothing is stated.'}</strong> {proposal.why}
       </p>

@@ -19,6 +19,9 @@ interface SignStepProps {
   onSigned: () => void;
 }
 
+/** Beyond a week the paper was not looked at, it was left open. */
+const MOST_SECONDS = 7 * 24 * 3600;
+
 /** What is signed, line by line, the sentence, and the hand of one's own. */
 export function SignStep({ proving, onBack, onSigned }: SignStepProps) {
   const me = useMe();
@@ -44,6 +47,7 @@ export function SignStep({ proving, onBack, onSigned }: SignStepProps) {
         coverage,
         decisions,
         password,
+        reviewSeconds: Math.min(proving.secondsOpen(), MOST_SECONDS),
       });
       proving.forgetPieces();
       onSigned();

@@ -24,6 +24,11 @@ export function Signatures({ proving: { data } }: { proving: Proving }) {
               </span>
             ))}
             , <Moment at={new Date(signature.signedAt)} clock={clock} />
+            {signature.reviewSeconds !== null && (
+              <span className="text-quiet">
+                , after {Math.max(1, Math.round(signature.reviewSeconds / 60))} min
+              </span>
+            )}
           </p>
           <p className="text-second text-quiet">“{signature.sentence}”</p>
           <p

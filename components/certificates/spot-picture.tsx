@@ -10,19 +10,16 @@ const AROUND = 14;
 const LARGEST = 4;
 
 /** The spot on the page, enlarged: cut out of the page as it is drawn beside the list. */
-export function SpotPicture({ fact, page }: { fact: Fact; page: KeptPage }) {
+export function SpotPicture({ fact, page, drawn }: { fact: Fact; page: KeptPage; drawn: number }) {
   const canvas = useRef<HTMLCanvasElement>(null);
   useEffect(() => {
-    const cut = () => {
-      const drawn = document.querySelector<HTMLCanvasElement>('.lw-sheet canvas');
-      if (!canvas.current || !drawn || drawn.width === 0) return;
-      cutOut(canvas.current, drawn, fact, page);
-    };
-    cut();
-    // The page may still be on its way to being drawn.
-    const again = setInterval(cut, 300);
-    return () => clearInterval(again);
-  }, [fact, page]);
+    const picture = document.querySelector<HTMLCanvasElement | HTMLImageElement>(
+      '.lw-sheet canvas, img.lw-drawn',
+    );
+    if (canvas.current) canvas.current.hidden = picture === null;
+    if (canvas.current && picture) cutOut(canvas.current, picture, fact, page);
+    // Cut again whenever a page was drawn: it may still have been on its way.
+  }, [fact, page, drawn]);
   return (
     <canvas
       ref={canvas}
@@ -36,8 +33,15 @@ export function SpotPicture({ fact, page }: { fact: Fact; page: KeptPage }) {
   );
 }
 
-function cutOut(to: HTMLCanvasElement, drawn: HTMLCanvasElement, { box }: Fact, page: KeptPage) {
-  const pixels = drawn.width / page.width;
+function cutOut(
+  to: HTMLCanvasElement,
+  drawn: HTMLCanvasElement | HTMLImageElement,
+  { box }: Fact,
+  page: KeptPage,
+) {
+  const wide = 'naturalWidth' in drawn ? drawn.naturalWidth : drawn.width;
+  if (wide === 0) return;
+  const pixels = wide / page.width;
   const [left, top, right, bottom] = box.map((points) => points * pixels) as [number, number, number, number];
   const around = AROUND * pixels;
   const scale = Math.min(

@@ -2,7 +2,7 @@
 import { useEffect, useRef } from 'react';
 
 /** A thin line from the lit spot on the page to the row that is open, as long as both can be seen. */
-export function Thread({ row }: { row: string | null }) {
+export function Thread({ row, drawn }: { row: string | null; drawn: number }) {
   const path = useRef<SVGPathElement>(null);
   useEffect(() => {
     let frame = 0;
@@ -14,18 +14,15 @@ export function Thread({ row }: { row: string | null }) {
       frame = requestAnimationFrame(draw);
     };
     drawSoon();
-    // The page is drawn some time after the row is chosen.
-    const seen = new MutationObserver(drawSoon);
-    seen.observe(document.body, { childList: true, subtree: true });
     window.addEventListener('scroll', drawSoon, { capture: true, passive: true });
     window.addEventListener('resize', drawSoon);
     return () => {
       cancelAnimationFrame(frame);
-      seen.disconnect();
       window.removeEventListener('scroll', drawSoon, { capture: true });
       window.removeEventListener('resize', drawSoon);
     };
-  }, [row]);
+    // The page is drawn some time after the row is chosen.
+  }, [row, drawn]);
   return (
     <svg
       aria-hidden="true"

@@ -5,10 +5,15 @@ const NEAREST = 4;
 const FURTHEST = 0.5;
 const STEP = 1.25;
 
-/** Which page, how near, which way up. Kept outside the page itself, so that a chart and back again starts anew on purpose. */
-export function usePaging() {
+/**
+ * Which page, how near, which way up. Kept outside the page itself, so that a chart and back again starts anew on purpose.
+ *
+ * @param given how many pages there are, where that is known before one is drawn.
+ */
+export function usePaging(given: number | null = null) {
   const [page, setPage] = useState(1);
-  const [pages, setPages] = useState(1);
+  const [found, setPages] = useState(1);
+  const pages = given ?? found;
   const [zoom, setZoom] = useState(1);
   const [turned, setTurned] = useState(0);
   return {

@@ -32,6 +32,7 @@ export function useProving(certificateId: string) {
   const [selected, setSelected] = useState<string | null>(null);
   const entering = usePiecesEntered(certificateId, data.lines);
   const reading = useReading(certificateId);
+  const [openedAt] = useState(() => performance.now());
   const { pieces } = entering;
   const writeAll = useWrite(decideRequirements, { refreshes: [getCertificate, listCertificates] });
   const write = useWrite(decideRequirement, { refreshes: [getCertificate, listCertificates] });
@@ -105,6 +106,8 @@ export function useProving(certificateId: string) {
     decideAll,
     ...entering,
     reading,
+    /** Since the paper was opened, for the record of the review. */
+    secondsOpen: () => Math.round((performance.now() - openedAt) / 1000),
     coverage: coverage.filter((line) => line.pieces > 0),
     readiness,
     rows,

@@ -1,5 +1,5 @@
 'use client';
-import { useState } from 'react';
+import { useCallback, useState } from 'react';
 
 import { useLazyRead } from '@/components/api/use-api';
 import type { ProvedRequirement } from '@/lib/certificates/contract';
@@ -30,11 +30,15 @@ export function useReading(certificateId: string) {
   );
   /** Words chosen on the page for the row that is open. */
   const [chosen, setChosen] = useState('');
+  /** Counts the pages drawn, for what points at the one on the screen. */
+  const [drawn, setDrawn] = useState(0);
+  const onDrawn = useCallback(() => setDrawn((count) => count + 1), []);
   const proposalOf = (requirementId: string) =>
     data?.proposals.find((one) => one.requirementId === requirementId);
   const piecesOf = (lineNo: number) => data?.lines.find((line) => line.lineNo === lineNo);
-  return { data, proposalOf, piecesOf, chosen, choose: setChosen };
+  return { data, proposalOf, piecesOf, chosen, choose: setChosen, drawn, onDrawn };
 }
+
 export const qualityOfProposal = ({ confidence }: Pick<Proposal, 'confidence'>): ReadQuality | null =>
   confidence === null ? null : qualityOf(confidence);
 

@@ -6,7 +6,6 @@ import { cancelBatch } from '@/lib/batches/cancel-batch';
 import { createBatch } from '@/lib/batches/create-batch';
 import { dispatchBatch } from '@/lib/batches/dispatch-batch';
 import { setRequirements } from '@/lib/batches/set-requirements';
-import type { ToProve } from '@/lib/parts/to-prove';
 import { acknowledgeBatch } from '@/lib/portal/acknowledge-batch';
 import { promiseDay } from '@/lib/portal/promise-day';
 import { sendPaper } from '@/lib/portal/send-paper';
@@ -19,64 +18,12 @@ import { releasePieces } from '@/lib/stock/release-pieces';
 import { getGate } from '@/lib/stock/queries';
 
 import { certificateOf, invoiceOf, keepPaper } from './batch-papers';
+import type { BatchPlot, Crew } from './batch-plot';
 import { recordOfSolution } from './furnace-record';
 import { proveCertificate } from './prove';
 import { payThrough } from './pay';
-import { addDays, dayOf, type DemoPerson, type DemoProcessor } from './organisations';
+import { addDays, dayOf, type DemoPerson } from './organisations';
 import type { StagePlay } from './stage-play';
-
-export interface LineToSend {
-  lotId: string;
-  stepId: string;
-  pieces: number;
-  unitPriceMinor: number;
-}
-
-/** What happens to one batch, in days after it was begun. What is left out does not happen (yet). */
-export interface BatchPlot {
-  processor: DemoProcessor;
-  lines: readonly LineToSend[];
-  wholeBatch?: readonly ToProve[];
-  lotMinimumMinor?: number;
-  certificationFeeMinor?: number;
-  begun: Date;
-  leavesInDays: number;
-  wantedInDays: number;
-  dispatchedAfter?: number;
-  acknowledgedAfter?: number;
-  /** Days of begun that are promised, in turn. */
-  promises?: readonly number[];
-  question?: { after: number; body: string };
-  /** Called back before anything of it came back. */
-  cancelled?: { after: number; reason: string };
-  shippedAfter?: number;
-  receivedAfter?: number;
-  /** Short of the last line in this delivery. */
-  missing?: number;
-  papersAfter?: number;
-  /** Pieces of the last line that the certificate does not cover. */
-  uncovered?: number;
-  /** What the certificate states otherwise than it ought to, by characteristic. */
-  states?: Readonly<Record<string, string>>;
-  /** Minutes at temperature on the chart that comes with the certificate; without it no chart comes. */
-  soakedMin?: number;
-  provedAfter?: number;
-  held?: { after: number; pieces: number; what: string };
-  invoicedAfter?: number;
-  /** What the invoice asks too much, on top of the order. */
-  invoiceExtra?: { description: string; amountMinor: number };
-  enteredAfter?: number;
-  paidAfter?: number;
-  releasedAfter?: number;
-}
-
-export interface Crew {
-  lead: DemoPerson;
-  inspector: DemoPerson;
-  office: DemoPerson;
-  shopId: string;
-  locationId: string;
-}
 
 /** Plays one batch from being built to being stocked, as far as its plot goes. */
 export async function* batchThread(

@@ -2,7 +2,8 @@ import { createLot } from '@/lib/lots/create-lot';
 import { getPart } from '@/lib/parts/queries';
 import type { Process } from '@/lib/trade/process';
 
-import { batchThread, type BatchPlot, type Crew } from './batch-thread';
+import type { BatchPlot, Crew } from './batch-plot';
+import { batchThread } from './batch-thread';
 import { keepFile } from './keep-file';
 import { addDays, dayOf, type DemoOrganisations, type DemoProcessor } from './organisations';
 import { makeForm } from './papers';

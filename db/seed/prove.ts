@@ -54,5 +54,6 @@ export async function proveCertificate(
       decision ? [{ requirementId: id, version: decision.version }] : [],
     ),
     password: DEMO_PASSWORD,
+    reviewSeconds: null,
   });
 }

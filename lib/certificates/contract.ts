@@ -142,6 +142,8 @@ export const CertificateDetail = z.object({
       signedAt: Moment,
       seal: z.string(),
       fileSha256: z.string(),
+      /** How long the paper lay open before the signer; null where no screen could tell. */
+      reviewSeconds: z.int().nullable(),
       /** What was sealed still has the hash it was sealed with. */
       intact: z.boolean(),
       coverage: z.array(z.object({ lineNo: z.int(), partNumber: z.string(), pieces: z.int() })),
@@ -298,6 +300,13 @@ export const SignCertificate = z.object({
   /** The decisions as the signer saw them, so that nobody signs what changed under their eyes. */
   decisions: z.array(z.object({ requirementId: Id, version: z.int() })).max(1000),
   password: z.string().min(1, 'Enter your password.').max(200),
+  /** How long the paper lay open before the signer, where the screen can tell. */
+  reviewSeconds: z
+    .int()
+    .min(0)
+    .max(7 * 24 * 3600)
+    .nullable()
+    .default(null),
 });
 
 export const signCertificate = declare({

@@ -195,13 +195,14 @@ async function signaturesOf(ctx: Ctx, certificateId: string) {
     .innerJoin(batchLines, eq(batchLines.id, coverage.lineId))
     .where(eq(coverage.certificateId, certificateId))
     .orderBy(asc(batchLines.lineNo));
-  return signed.map(({ id, sentence, signerName, signedAt, seal, sealed, fileSha256 }) => ({
+  return signed.map(({ id, sentence, signerName, signedAt, seal, sealed, fileSha256, reviewSeconds }) => ({
     id,
     sentence,
     signerName,
     signedAt,
     seal,
     fileSha256,
+    reviewSeconds,
     intact: sealOf(sealed) === seal,
     coverage: covers
       .filter((one) => one.signatureId === id)

@@ -73,6 +73,7 @@ export async function signCertificate(ctx: Ctx, input: Input) {
     signedBy: signer.id,
     signerName: signer.name,
     signedAt: ctx.now,
+    reviewSeconds: input.reviewSeconds,
   });
   await ctx.tx.insert(coverage).values(
     input.coverage.map(({ lineId, pieces }) => ({

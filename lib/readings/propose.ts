@@ -4,7 +4,7 @@ import type {
   SeenCertificate,
   StatedCertificate,
 } from '@/lib/evidence/certificate/certificate';
-import { compare } from '@/lib/evidence/certificate/compare/compare';
+import { compare, type Comparison } from '@/lib/evidence/certificate/compare/compare';
 import type { Fact } from '@/lib/evidence/fact';
 import type { Order, Requirements } from '@/lib/evidence/order';
 import type { OpenedFile } from '@/lib/evidence/page';
@@ -97,13 +97,20 @@ const NEEDED: readonly (readonly [RegExp, RegExp])[] = [
  * and one of a line, and each has its own answer.
  */
 export function propose({ order, requirements }: BatchOrder, compared: Compared): Proposed {
-  const against = (asked: Requirements) => compare({ ...compared, order: { ...order, requirements: asked } });
+  const known = new Map<string, Comparison>();
+  /** Many lines ask for the same: each question is answered once. */
+  const against = (asked: Requirements): Comparison => {
+    const key = JSON.stringify(asked);
+    const answer = known.get(key) ?? compare({ ...compared, order: { ...order, requirements: asked } });
+    known.set(key, answer);
+    return answer;
+  };
   const unasked = against({});
   const answers = requirements.map((requirement) => ({
     requirement,
     answer: requirement.figures && against(requirement.figures.asked),
   }));
-  const outcomes = [unasked, ...answers.flatMap(({ answer }) => answer ?? [])];
+  const outcomes = [...known.values()];
   const discrepancies = unique(outcomes.flatMap((outcome) => outcome.discrepancies));
   const facts = compared.stated.facts.map((fact) => ({ ...fact, field: named(fact.field, compared.stated) }));
   return {

@@ -134,7 +134,14 @@ export async function signingInput(ctx: Ctx, certificateId: string, pieces: read
   const decisions = requirements.flatMap(({ id, decision }) =>
     decision ? [{ requirementId: id, version: decision.version }] : [],
   );
-  return { certificateId, version: certificate.version, coverage, decisions, password: PASSWORD };
+  return {
+    certificateId,
+    version: certificate.version,
+    coverage,
+    decisions,
+    password: PASSWORD,
+    reviewSeconds: 95,
+  };
 }
 
 /** A certificate of the batch, proved and signed for these pieces. The person needs the password of `givePassword`. */

@@ -1,7 +1,10 @@
 import sharp from 'sharp';
+
+import { chainProjections, inverseOf, scaling, squareOnto } from '@/lib/evidence/open/picture/projection';
+
 import { bell, seeded } from './random';
 import type { Raster } from './raster';
-import { invert, multiply, squareTo, turn, warp } from './warp';
+import { turn, warp } from './warp';
 
 export interface PhotographSettings {
   readonly seed: number;
@@ -46,8 +49,8 @@ export async function photographPage(page: Raster, settings: PhotographSettings)
     width * (x + (x < 0.5 ? 1 : -1) * (0.03 + 0.07 * settings.perspective * random())),
     height * (y + (y < 0.5 ? 1 : -1) * (0.03 + 0.05 * settings.perspective * random())),
   ];
-  const onPhotograph = squareTo([corner(0, 0), corner(1, 0), corner(1, 1), corner(0, 1)]);
-  const toSheet = multiply([pw, 0, 0, 0, ph, 0, 0, 0, 1], invert(onPhotograph));
+  const onPhotograph = squareOnto([corner(0, 0), corner(1, 0), corner(1, 1), corner(0, 1)]);
+  const toSheet = chainProjections(inverseOf(onPhotograph), scaling(pw, ph));
   const desk = DESKS[settings.desk];
   const ground = (x: number, y: number) => {
     const grain = settings.desk === 'wood' ? 14 * Math.sin(y / 9 + 3 * Math.sin(x / 160)) : 0;

@@ -1,7 +1,6 @@
-import { blank, type Raster } from './raster';
+import { project, type Projection } from '@/lib/evidence/open/picture/projection';
 
-/** Nine numbers, row by row: a pixel of the result comes from (x', y') / w' of the source. */
-export type Projection = readonly [number, number, number, number, number, number, number, number, number];
+import { blank, type Raster } from './raster';
 
 /**
  * Takes each pixel of a `width` × `height` picture from where `toSource` puts it, between its four neighbours.
@@ -17,12 +16,9 @@ export function warp(
   }: { width: number; height: number; ground: (x: number, y: number) => readonly number[] },
 ): Raster {
   const out = blank(width, height, source.dpi);
-  const [a, b, c, d, e, f, g, h, i] = toSource;
   for (let y = 0; y < height; y++) {
     for (let x = 0; x < width; x++) {
-      const w = g * x + h * y + i;
-      const sx = (a * x + b * y + c) / w;
-      const sy = (d * x + e * y + f) / w;
+      const [sx, sy] = project(toSource, x, y);
       const at = (y * width + x) * 4;
       if (sx < 0 || sy < 0 || sx >= source.width - 1 || sy >= source.height - 1) {
         const colour = ground(x, y);
@@ -60,48 +56,4 @@ export function turn(source: Raster, degrees: 0 | 90 | 180 | 270): Raster {
     }
   }
   return out;
-}
-
-type Point = readonly [number, number];
-
-/** The projection that carries the corners (0,0), (1,0), (1,1), (0,1) of a unit square to four points. */
-export function squareTo([p0, p1, p2, p3]: readonly [Point, Point, Point, Point]): Projection {
-  const dx = p0[0] - p1[0] + p2[0] - p3[0];
-  const dy = p0[1] - p1[1] + p2[1] - p3[1];
-  const [dx1, dx2, dy1, dy2] = [p1[0] - p2[0], p3[0] - p2[0], p1[1] - p2[1], p3[1] - p2[1]];
-  const det = dx1 * dy2 - dx2 * dy1;
-  const g = (dx * dy2 - dx2 * dy) / det;
-  const h = (dx1 * dy - dx * dy1) / det;
-  return [
-    p1[0] - p0[0] + g * p1[0],
-    p3[0] - p0[0] + h * p3[0],
-    p0[0],
-    p1[1] - p0[1] + g * p1[1],
-    p3[1] - p0[1] + h * p3[1],
-    p0[1],
-    g,
-    h,
-    1,
-  ];
-}
-
-export function invert([a, b, c, d, e, f, g, h, i]: Projection): Projection {
-  return [
-    e * i - f * h,
-    c * h - b * i,
-    b * f - c * e,
-    f * g - d * i,
-    a * i - c * g,
-    c * d - a * f,
-    d * h - e * g,
-    b * g - a * h,
-    a * e - b * d,
-  ];
-}
-
-/** `after` is done after `first`. */
-export function multiply(after: Projection, first: Projection): Projection {
-  const at = (row: number, column: number) =>
-    [0, 1, 2].reduce((sum, k) => sum + (after[row * 3 + k] ?? 0) * (first[k * 3 + column] ?? 0), 0);
-  return [at(0, 0), at(0, 1), at(0, 2), at(1, 0), at(1, 1), at(1, 2), at(2, 0), at(2, 1), at(2, 2)];
 }

@@ -72,6 +72,7 @@ test('signing seals file, decisions, coverage and sentence together, and the bat
     });
     expect((await getCertificate(ctx, { certificateId })).signatures[0]).toMatchObject({
       intact: true,
+      reviewSeconds: 95,
       signerName: 'Test Person',
     });
   });
@@ -154,6 +155,7 @@ test('a person without a password cannot sign, nor can a program with a token', 
       coverage: [{ lineId: newId(), pieces: 1 }],
       decisions: [],
       password: 'any',
+      reviewSeconds: null,
     };
     await expect(signCertificate(ctx, input)).rejects.toMatchObject({
       code: 'not_allowed',
