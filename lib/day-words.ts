@@ -39,10 +39,13 @@ export function calendarDay(when: Date, zone: string): CalendarDay {
   return `${year}-${monthNumber}-${day.padStart(2, '0')}`;
 }
 
+/** Whole days from one day to another; negative where `to` is earlier. */
+export const daysBetween = (from: CalendarDay, to: CalendarDay): number =>
+  Math.round((midnightUtc(to) - midnightUtc(from)) / MS_PER_DAY);
+
 /** Whole days from today until then; negative when it is past. */
-export function daysUntil(when: CalendarDay, { zone, now }: Clock): number {
-  return Math.round((midnightUtc(when) - midnightUtc(calendarDay(now, zone))) / MS_PER_DAY);
-}
+export const daysUntil = (when: CalendarDay, { zone, now }: Clock): number =>
+  daysBetween(calendarDay(now, zone), when);
 
 /** `6 d late`, `today`, `in 5 d`. */
 export function untilWords(when: CalendarDay, clock: Clock): string {
@@ -50,6 +53,9 @@ export function untilWords(when: CalendarDay, clock: Clock): string {
   if (days === 0) return 'today';
   return days < 0 ? `${-days} d late` : `in ${days} d`;
 }
+
+/** From 0, Sunday, to 6. */
+export const weekdayOf = (when: CalendarDay): number => new Date(midnightUtc(when)).getUTCDay();
 
 export function addDays(when: CalendarDay, days: number): CalendarDay {
   return new Date(midnightUtc(when) + days * MS_PER_DAY).toISOString().slice(0, 10);
@@ -66,10 +72,10 @@ interface DayParts {
 }
 
 function partsOf(when: Date | CalendarDay, zone: string): DayParts {
-  const [moment, readIn] = typeof when === 'string' ? [new Date(midnightUtc(when)), 'UTC'] : [when, zone];
+  if (typeof when === 'string') return partsOfDay(when);
   const found = new Map(
-    formatIn(readIn)
-      .formatToParts(moment)
+    formatIn(zone)
+      .formatToParts(when)
       .map((part) => [part.type, part.value]),
   );
   const text = (type: Intl.DateTimeFormatPartTypes) => found.get(type) ?? '';
@@ -85,6 +91,21 @@ function partsOf(when: Date | CalendarDay, zone: string): DayParts {
   };
 }
 
+/** A day needs no zone, and a drawing asks for hundreds of them. */
+function partsOfDay(day: CalendarDay): DayParts {
+  const [year = '', monthNumber = '', date = ''] = day.split('-');
+  return {
+    weekday: WEEKDAYS[weekdayOf(day)] ?? '',
+    day: String(Number(date)),
+    month: MONTHS[Number(monthNumber) - 1] ?? '',
+    monthNumber,
+    year,
+    hour: '00',
+    minute: '00',
+  };
+}
+
+const WEEKDAYS = ['Sun', 'Mon', 'Tue', 'Wed', 'Thu', 'Fri', 'Sat'];
 /** Named here because locales disagree on "Sep" and "Sept", and a column of days must line up. */
 const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'];
 
@@ -114,6 +135,11 @@ function midnightUtc(day: CalendarDay): number {
   return Date.UTC(Number(year), Number(month) - 1, Number(date));
 }
 
-function yearUnlessThis(year: string, { zone, now }: Clock): string {
-  return year === partsOf(now, zone).year ? '' : ` ${year}`;
+function yearUnlessThis(year: string, clock: Clock): string {
+  const thisYear = thisYears.get(clock) ?? partsOf(clock.now, clock.zone).year;
+  thisYears.set(clock, thisYear);
+  return year === thisYear ? '' : ` ${year}`;
 }
+
+/** A column of days asks one clock again and again. */
+const thisYears = new WeakMap<Clock, string>();

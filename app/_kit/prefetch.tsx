@@ -18,6 +18,13 @@ import { identify } from './session';
 export const viewer = cache(async (): Promise<Identity> => identify(await headers(), new Date()));
 
 type Asked = readonly [Endpoint, Record<string, unknown>];
+interface Answer {
+  key: readonly unknown[];
+  data: unknown;
+}
+
+/** What this request has asked already: title, frame and page of one request often ask the same. */
+const answered = cache(() => new Map<string, Promise<Answer>>());
 
 /** One read and what it is asked, checked against each other. */
 export const ask = <D extends Declaration>(endpoint: Endpoint<D>, input: InputOf<D>): Asked => [
@@ -45,7 +52,24 @@ export async function readOnServer<D extends Declaration>(
   return result?.data as OutputOf<D>;
 }
 
-async function readAll(queries: readonly Asked[]): Promise<{ key: readonly unknown[]; data: unknown }[]> {
+async function readAll(queries: readonly Asked[]): Promise<Answer[]> {
+  const known = answered();
+  const nameOf = ([{ declaration }, input]: Asked): string => JSON.stringify(queryKeyOf(declaration, input));
+  const open = queries.filter((asked) => !known.has(nameOf(asked)));
+  if (open.length > 0) {
+    const reading = readTogether(open);
+    open.forEach((asked, at) =>
+      known.set(
+        nameOf(asked),
+        reading.then((answers) => answers[at] as Answer),
+      ),
+    );
+  }
+  return Promise.all(queries.map((asked) => known.get(nameOf(asked)) as Promise<Answer>));
+}
+
+/** All in one transaction, as whoever looks. */
+async function readTogether(queries: readonly Asked[]): Promise<Answer[]> {
   const isPublic = queries.every(([endpoint]) => endpoint.declaration.side === 'public');
   const who = await viewer();
   const identity: Identity = isPublic ? { ...who, tenant: { kind: 'door' } } : who;

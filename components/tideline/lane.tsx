@@ -1,10 +1,9 @@
 import Link from 'next/link';
 
-import { shortDayWords } from '@/lib/day-words';
+import { daysBetween, shortDayWords } from '@/lib/day-words';
 import { PROCESS_WORDS, type Process } from '@/lib/trade/process';
 import type { Tideline, TidelineLane } from '@/lib/tideline/contract';
 import type { PlacedLane } from '@/lib/tideline/lay-out';
-import { daysBetween } from '@/lib/tideline/lateness';
 import type { Scale } from '@/lib/tideline/scale';
 
 import { LaneStrings } from './lane-strings';

@@ -1,7 +1,6 @@
 import { BatchTag } from '@/components/ui/tag';
-import { dayWords, shortDayWords, timeWords } from '@/lib/day-words';
+import { daysBetween, dayWords, shortDayWords, timeWords } from '@/lib/day-words';
 import type { Tideline, TidelineBatch } from '@/lib/tideline/contract';
-import { daysBetween } from '@/lib/tideline/lateness';
 import { phoneGroups } from '@/lib/tideline/phone-groups';
 
 const LONGEST_STEM_DAYS = 20;

@@ -2,9 +2,8 @@ import Link from 'next/link';
 
 import { BatchTag } from '@/components/ui/tag';
 import { LateFlag } from '@/components/ui/day';
-import { shortDayWords } from '@/lib/day-words';
+import { daysBetween, shortDayWords } from '@/lib/day-words';
 import { flagWidth, outsideWords, tagTop, type PlacedTag } from '@/lib/tideline/lay-out';
-import { daysBetween } from '@/lib/tideline/lateness';
 import type { Scale } from '@/lib/tideline/scale';
 
 interface TagLinkProps {

@@ -12,7 +12,7 @@ import type { Ctx } from '@/lib/auth/context';
 import { notFound } from '@/lib/errors';
 import { fileRefColumns } from '@/lib/files/queries';
 import type { Process } from '@/lib/trade/process';
-import { patternsOf } from '@/lib/search/patterns';
+import { beginsWith } from '@/lib/search/matches';
 import type { Place } from '@/lib/stock/places';
 
 import type {
@@ -70,12 +70,8 @@ export async function listLots(
 }
 
 function textMatches(text: string): SQL {
-  const like = (column: SQL) =>
-    sql.join(
-      patternsOf(text).map((pattern) => sql`${column} like ${pattern}`),
-      sql` or `,
-    );
-  return sql`(${like(sql`lots.number`)} or ${like(sql`parts.number`)} or ${like(sql`lots.heat`)})`;
+  const begins = (column: SQL) => beginsWith(column, text);
+  return sql`(${begins(sql`lots.number`)} or ${begins(sql`parts.number`)} or ${begins(sql`lots.heat`)})`;
 }
 
 export async function getLot(ctx: Ctx, { lotId }: { lotId: string }) {

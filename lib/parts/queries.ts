@@ -12,7 +12,7 @@ import { notFound } from '@/lib/errors';
 import { fileRefColumns } from '@/lib/files/queries';
 import { madeOfLot, placesOfLot } from '@/lib/lots/where-pieces-are';
 import { tablesOf } from '@/lib/reference/tables-of';
-import { contains, patternsOf } from '@/lib/search/patterns';
+import { beginsWith, contains } from '@/lib/search/matches';
 
 import { computedMassOf, type KeptPart } from './computed-mass';
 import type { listParts as listDeclaration, PiecesAt } from './contract';
@@ -32,10 +32,7 @@ export async function listParts(
     ...(superseded === '0' ? [sql`${parts.supersededAt} is null`] : []),
     ...(text
       ? [
-          sql`(${sql.join(
-            patternsOf(text).map((pattern) => sql`${parts.number} like ${pattern}`),
-            sql` or `,
-          )} or ${parts.name} ilike ${contains(text)} or ${parts.alloy} ilike ${contains(text)})`,
+          sql`(${beginsWith(parts.number, text)} or ${parts.name} ilike ${contains(text)} or ${parts.alloy} ilike ${contains(text)})`,
         ]
       : []),
     ...(after === undefined

@@ -7,7 +7,7 @@ import type { Ctx } from '@/lib/auth/context';
 import { hashToken } from '@/lib/auth/identify';
 
 import { HIT_KINDS, type Hit, type HitKind, type listNumbers as listDeclaration } from './contract';
-import { patternsOf } from './patterns';
+import { beginsWith } from './matches';
 
 type Row<T> = T & Record<string, unknown>;
 
@@ -144,13 +144,9 @@ function ofKind(
   { text, after, limit }: { text: string; after?: string | undefined; limit: number },
 ): SQL {
   const { from, number, shown = number, id, says, page, only } = KINDS[kind];
-  const like = sql.join(
-    patternsOf(text).map((pattern) => sql`${number} like ${pattern}`),
-    sql` or `,
-  );
   const [, afterId, afterNumber] = /^([\da-f-]{36}) (.*)$/.exec(after ?? '') ?? [];
   const further =
     afterId === undefined ? sql`` : sql`and (${number}, ${id}) > (${afterNumber}, ${afterId}::uuid)`;
   return sql`select ${kind}::text as kind, ${shown} as number, ${says} as says, ${page}::text || ${id} as href, ${number} as key, ${id} as id
-    from ${from} where (${like}) ${only ? sql`and ${only}` : sql``} ${further} order by ${number}, ${id} limit ${limit}`;
+    from ${from} where ${beginsWith(number, text)} ${only ? sql`and ${only}` : sql``} ${further} order by ${number}, ${id} limit ${limit}`;
 }

@@ -8,7 +8,7 @@ import { toPage } from '@/lib/api/paging';
 import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
 import { notFound } from '@/lib/errors';
-import { contains, patternsOf } from '@/lib/search/patterns';
+import { beginsWith, contains } from '@/lib/search/matches';
 
 import type {
   GateLine,
@@ -54,15 +54,10 @@ export async function listStock(
   return toPage<StockRow>(rows, limit, (row) => `${row.partNumber}|${row.lotNumber}|${row.location}`);
 }
 
-const likeText = (text: string) =>
-  sql`and (a.name ilike ${contains(text)} or ${sql.join(
-    patternsOf(text).flatMap((pattern) => [
-      sql`a.number like ${pattern}`,
-      sql`o.number like ${pattern}`,
-      sql`o.heat like ${pattern}`,
-    ]),
-    sql` or `,
-  )})`;
+const likeText = (text: string) => {
+  const [part, lot, heat] = [sql`a.number`, sql`o.number`, sql`o.heat`].map((of) => beginsWith(of, text));
+  return sql`and (a.name ilike ${contains(text)} or ${part} or ${lot} or ${heat})`;
+};
 
 /** What may be done with pieces of one lot in one place. */
 export async function getStockSpot(

@@ -86,8 +86,8 @@ async function readBatches(ctx: Ctx, zone: string): Promise<TidelineBatch[]> {
         join assembly_needs n on n.part_number = a.number and n.shop_id = b.shop_id join assemblies y on y.id = n.assembly_id and y.closed_at is null
         where l.batch_id = b.id) s having count(*) > 0
     ) need on true
-    where b.put_aside_at is null and (b.stage in ('building', 'dispatched', 'at_processor', 'returned', 'proved', 'settled', 'held')
-      or (b.stage = 'stocked' and b.stocked_at > ${ctx.now.toISOString()}::timestamptz - make_interval(days => ${STAYS_DAYS})))
+    where b.put_aside_at is null and b.cancelled_at is null
+      and (b.stocked_at is null or b.stocked_at > ${ctx.now.toISOString()}::timestamptz - make_interval(days => ${STAYS_DAYS}))
     order by coalesce(b.dispatched_at, b.created_at), b.id`);
   return rows.map(({ names, ...batch }) => ({ ...batch, contents: contentsWords(batch.pieces, names) }));
 }

@@ -1,10 +1,6 @@
-import { differenceInCalendarDays, parseISO } from 'date-fns';
+import { daysBetween } from '@/lib/day-words';
 
 import type { TidelineBatch } from './contract';
-
-/** Whole days from one calendar day to another; negative where `to` is earlier. */
-export const daysBetween = (from: string, to: string): number =>
-  differenceInCalendarDays(parseISO(to), parseISO(from));
 
 /**
  * How many days a batch is late today. Late begins on the day after the promised one, and ends when everything is

@@ -1,6 +1,8 @@
+import { addDays, daysBetween } from '@/lib/day-words';
+
 import type { Tideline, TidelineBatch } from './contract';
-import { daysBetween, daysLate } from './lateness';
-import { addDaysTo, xOf, type Scale } from './scale';
+import { daysLate } from './lateness';
+import { xOf, type Scale } from './scale';
 import { stringOf, widthOfText, type TagString } from './strings';
 
 export const ROW_PX = 30;
@@ -78,17 +80,20 @@ const laneHeight = (content: number): number => Math.max(SMALLEST_LANE_PX, conte
 
 /** Held first, then late (most first), then undated, then by the day out: the order in which rows are given. */
 function placeTags(tideline: Tideline, scale: Scale, batches: readonly TidelineBatch[]): PlacedTag[] {
-  const late = (batch: TidelineBatch) => daysLate(batch, tideline.today, tideline.latenessBasis);
-  const group = (batch: TidelineBatch) =>
-    [batch.stage === 'held', late(batch) > 0, isUndated(batch)].findIndex(Boolean) + 1 || 4;
-  const inOrder = [...batches].sort(
-    (a, b) =>
-      group(a) - group(b) ||
-      late(b) - late(a) ||
-      startOf(a, tideline.today).localeCompare(startOf(b, tideline.today)) ||
-      a.number.localeCompare(b.number),
-  );
-  const tags = inOrder.map((batch) => placeTag(batch, late(batch), tideline, scale));
+  const inOrder = batches
+    .map((batch) => {
+      const late = daysLate(batch, tideline.today, tideline.latenessBasis);
+      const group = [batch.stage === 'held', late > 0, isUndated(batch)].findIndex(Boolean) + 1 || 4;
+      return { batch, late, group, start: startOf(batch, tideline.today) };
+    })
+    .sort(
+      (a, b) =>
+        a.group - b.group ||
+        b.late - a.late ||
+        a.start.localeCompare(b.start) ||
+        a.batch.number.localeCompare(b.batch.number),
+    );
+  const tags = inOrder.map(({ batch, late }) => placeTag(batch, late, tideline, scale));
   const rows = firstFit(tags.map((tag) => ({ from: tag.x, to: endOf(tag, scale) + 12 })));
   return tags.map((tag, at) => ({ ...tag, row: rows[at] ?? 0 }));
 }
@@ -134,9 +139,9 @@ const startOf = (batch: TidelineBatch, today: string): string =>
 function endDayOf(batch: TidelineBatch, { today }: Tideline): string {
   const start = startOf(batch, today);
   if (batch.stage === 'building')
-    return batch.wantedBackOn ?? addDaysTo(start < today ? today : start, UNDATED_DAYS);
+    return batch.wantedBackOn ?? addDays(start < today ? today : start, UNDATED_DAYS);
   if (batch.piecesBack >= batch.pieces && batch.lastBackOn !== null) return batch.lastBackOn;
-  return batch.promisedOn ?? addDaysTo(start, UNDATED_DAYS);
+  return batch.promisedOn ?? addDays(start, UNDATED_DAYS);
 }
 
 function afterWords(batch: TidelineBatch, { today }: Tideline): string | null {

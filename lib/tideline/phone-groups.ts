@@ -1,6 +1,7 @@
+import { daysBetween, weekdayOf } from '@/lib/day-words';
+
 import type { Tideline, TidelineBatch } from './contract';
-import { daysBetween, daysLate } from './lateness';
-import { addDaysTo } from './scale';
+import { daysLate } from './lateness';
 
 export interface PhoneGroup {
   name: string;
@@ -46,7 +47,7 @@ function groupOf(batch: TidelineBatch, today: string): string {
   if (batch.promisedOn === null) return 'no date yet';
   const days = daysBetween(today, batch.promisedOn);
   if (days <= 1) return days <= 0 ? 'today' : 'tomorrow';
-  const daysLeftInWeek = 7 - ((new Date(`${addDaysTo(today, 0)}T00:00:00Z`).getUTCDay() + 6) % 7) - 1;
+  const daysLeftInWeek = 6 - ((weekdayOf(today) + 6) % 7);
   if (days <= daysLeftInWeek) return 'this week';
   return days <= daysLeftInWeek + 7 ? 'next week' : 'later';
 }

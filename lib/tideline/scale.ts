@@ -1,6 +1,4 @@
-import { addDays, format, getDay, parseISO } from 'date-fns';
-
-import { daysBetween } from './lateness';
+import { addDays, daysBetween, weekdayOf } from '@/lib/day-words';
 
 /** Pixels of a day, from a season at a glance to a week under the glass. */
 export const DAY_WIDTHS = [9, 18, 36] as const;
@@ -36,12 +34,12 @@ export function scaleFor({
   dayShare: number;
 }): Scale {
   const daysBefore = Math.round((widthPx * TODAY_AT) / dayPx);
-  const firstDay = addDaysTo(today, -daysBefore);
+  const firstDay = addDays(today, -daysBefore);
   return {
     dayPx,
     widthPx,
     firstDay,
-    lastDay: addDaysTo(firstDay, Math.ceil(widthPx / dayPx)),
+    lastDay: addDays(firstDay, Math.ceil(widthPx / dayPx)),
     today,
     todayX: (daysBefore + dayShare) * dayPx,
   };
@@ -50,14 +48,11 @@ export function scaleFor({
 /** The left edge of a day. */
 export const xOf = (scale: Scale, day: string): number => daysBetween(scale.firstDay, day) * scale.dayPx;
 
-export const addDaysTo = (day: string, days: number): string =>
-  format(addDays(parseISO(day), days), 'yyyy-MM-dd');
-
 /** Each day of the scale, with what its tick and its ground need. */
 export function daysOf(scale: Scale): { day: string; x: number; isMonday: boolean; isWeekend: boolean }[] {
   return Array.from({ length: daysBetween(scale.firstDay, scale.lastDay) }, (_, at) => {
-    const day = addDaysTo(scale.firstDay, at);
-    const weekday = getDay(parseISO(day));
+    const day = addDays(scale.firstDay, at);
+    const weekday = weekdayOf(day);
     return { day, x: at * scale.dayPx, isMonday: weekday === 1, isWeekend: weekday === 0 || weekday === 6 };
   });
 }

@@ -1,4 +1,4 @@
-import { format, parseISO } from 'date-fns';
+import { shortDayWords } from '@/lib/day-words';
 
 import type { TidelineBatch } from './contract';
 import { xOf, type Scale } from './scale';
@@ -31,7 +31,7 @@ export function stringOf(batch: TidelineBatch, endX: number, scale: Scale): TagS
   const { assembly } = batch;
   if (!assembly?.neededOn) return null;
   const name = assembly.name + (assembly.more > 0 ? ` and ${assembly.more} more` : '');
-  const day = format(parseISO(assembly.neededOn), 'd MMM');
+  const day = shortDayWords(assembly.neededOn, { zone: 'UTC', now: new Date(`${scale.today}T12:00:00Z`) });
   const needX = xOf(scale, assembly.neededOn) + scale.dayPx / 2;
   const labelWidth = widthOfText(name, 7.2) + widthOfText(day, 6.4) + GAP_PX;
   const common = { fromX: endX, name, day };

@@ -1,8 +1,8 @@
 import type { Role } from '@/lib/auth/roles';
-import { dayWords } from '@/lib/day-words';
+import { daysBetween, dayWords } from '@/lib/day-words';
 
 import type { Tideline, TidelineBatch, WaitingCounts } from './contract';
-import { daysBetween, daysLate } from './lateness';
+import { daysLate } from './lateness';
 
 /** One thing a person can do now about a batch. */
 export interface Waiting {

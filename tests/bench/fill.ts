@@ -59,10 +59,12 @@ export async function fill(client: pg.Client): Promise<Filled> {
 
 async function fillBatches(run: (statement: string) => Promise<unknown>, shop: string): Promise<void> {
   const closed = BATCHES - OPEN_BATCHES;
+  // Seven batches a working day, the last one twenty days ago: years of history, of which a week is fresh.
+  const sentAt = `(now() - interval '20 days' - (${BATCHES} - n) * interval '4 hours')`;
   await run(`insert into batches (id, shop_id, number, order_number, processor_id, process, specification, specification_revision, currency, leaves_on, wanted_back_on, dispatched_at, acknowledged_at, stage, pieces, pieces_back, promised_on, first_promised_on, last_back_at, stocked_at, payment_waived_at)
-    select ${ids(11, 'n')}, ${shop}, 'B-' || lpad(n::text, 5, '0'), 'BN-' || lpad(n::text, 5, '0'), ${ids(2, '(n % 4) + 1')}, 'solution_heat_treat_and_age', 'AMS 2770', 'R', 'USD', current_date - 20, current_date + 5, now() - '20 days'::interval, now() - '19 days'::interval,
+    select ${ids(11, 'n')}, ${shop}, 'B-' || lpad(n::text, 5, '0'), 'BN-' || lpad(n::text, 5, '0'), ${ids(2, '(n % 4) + 1')}, 'solution_heat_treat_and_age', 'AMS 2770', 'R', 'USD', current_date - 20, current_date + 5, ${sentAt}, ${sentAt} + interval '1 day',
       (case when n <= ${closed} then 'stocked' else 'at_processor' end)::stage, ${LINES_OF_A_BATCH * 10}, case when n <= ${closed} then ${LINES_OF_A_BATCH * 10} else 0 end, current_date + (n % 17 - 5)::int, current_date + (n % 17 - 5)::int,
-      case when n <= ${closed} then now() - '9 days'::interval end, case when n <= ${closed} then now() - '8 days'::interval end, case when n <= ${closed} then now() end
+      case when n <= ${closed} then ${sentAt} + interval '11 days' end, case when n <= ${closed} then ${sentAt} + interval '12 days' end, case when n <= ${closed} then ${sentAt} + interval '20 days' end
     from generate_series(1, ${BATCHES}) n`);
   await run(
     `insert into promises (id, shop_id, batch_id, promised_on, made_by, made_at) select ${ids(13, 'n')}, ${shop}, ${ids(11, 'n')}, current_date + (n % 17 - 5)::int, 'desk', now() - '19 days'::interval from generate_series(1, ${BATCHES}) n`,

@@ -1,0 +1,1 @@
+CREATE INDEX "batches_on_tideline" ON "batches" USING btree ("shop_id","stocked_at");
