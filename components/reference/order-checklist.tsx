@@ -1,9 +1,10 @@
 import { Checkbox } from '@/components/ui/choice';
 import { sourceWords } from '@/lib/batches/source-words';
-import { orderFactsOf } from '@/lib/parts/order-facts';
+import { orderFactsOf, orderItemsOf } from '@/lib/parts/order-facts';
 import { ORDER_FACT_WORDS, ORDERING_KIND_WORDS } from '@/lib/reference/ordering-words';
+import type { SpecificationReference } from '@/lib/trade/lineage/recognise-specification';
 import { missingItems } from '@/lib/trade/ordering/missing-items';
-import { ORDER_FACTS, ORDER_ITEM_WORDS, ORDER_ITEMS } from '@/lib/trade/ordering/order-item';
+import { ORDER_FACTS, ORDER_ITEM_WORDS, ORDER_ITEMS, type OrderItem } from '@/lib/trade/ordering/order-item';
 import {
   factsAskedFor,
   orderingChecklist,
@@ -25,22 +26,25 @@ const FIRMEST_FIRST: readonly OrderingKind[] = [
 ];
 
 interface OrderChecklistProps {
-  number: string;
-  /** What is called behind the number: `Type II Class 2`. */
-  rest: string;
+  /** As it is called: with its issue, type and class. */
+  called: SpecificationReference;
   bench: Bench<'so' | 'stated'>;
 }
 
 /** What the order has to state, to be ticked off; what is left is named. */
-export function OrderChecklist({ number, rest, bench }: OrderChecklistProps) {
+export function OrderChecklist({ called: { number, revision, rest }, bench }: OrderChecklistProps) {
   const said = orderFactsOf(rest);
   const open = factsAskedFor(ORDERING_INFORMATION, number).filter((fact) => !said.includes(fact));
   const ticked = ORDER_FACTS.filter((fact) => open.includes(fact) && wordsIn(bench.typed.so).includes(fact));
   const facts = [...said, ...ticked];
   const checklist = orderingChecklist(ORDERING_INFORMATION, number, facts);
+  const called: OrderItem[] = [
+    ...(revision === null ? [] : (['specification_and_revision'] as const)),
+    ...orderItemsOf(rest),
+  ];
   const stated = ORDER_ITEMS.filter((item) => wordsIn(bench.typed.stated).includes(item));
   const left = missingItems({ ordering: ORDERING_INFORMATION, commonest: MISSING_ITEMS }, number, {
-    stated,
+    stated: [...called, ...stated],
     facts,
   });
   const missing = left.ok ? left.missing.map(({ item }) => ORDER_ITEM_WORDS[item]) : [];
@@ -49,15 +53,21 @@ export function OrderChecklist({ number, rest, bench }: OrderChecklistProps) {
       <h3 className="pt-5">What the order states</h3>
       {checklist.ok ? (
         <>
-          {open.map((fact) => (
-            <Checkbox
-              key={fact}
-              says={<span className="first-letter:uppercase">{ORDER_FACT_WORDS[fact]}</span>}
-              note="this order"
-              checked={ticked.includes(fact)}
-              onChange={() => bench.set({ so: toggled(ticked, fact) })}
-            />
-          ))}
+          {open.length > 0 && (
+            <div role="group" aria-label="So of this order" className="pb-2">
+              <p className="text-second text-quiet">
+                Tick what is so of this order; it changes what is asked.
+              </p>
+              {open.map((fact) => (
+                <Checkbox
+                  key={fact}
+                  says={<Capital says={ORDER_FACT_WORDS[fact]} />}
+                  checked={ticked.includes(fact)}
+                  onChange={() => bench.set({ so: toggled(ticked, fact) })}
+                />
+              ))}
+            </div>
+          )}
           <p
             className={`border-l-4 py-[3px] pl-3 ${missing.length > 0 ? 'border-dispatched' : 'border-proved'}`}
           >
@@ -70,9 +80,14 @@ export function OrderChecklist({ number, rest, bench }: OrderChecklistProps) {
               (one) => (
                 <li key={one.item} className="border-b border-rule py-1">
                   <Checkbox
-                    says={<strong className="first-letter:uppercase">{ORDER_ITEM_WORDS[one.item]}</strong>}
-                    note={howAsked(one)}
-                    checked={stated.includes(one.item)}
+                    says={
+                      <strong>
+                        <Capital says={ORDER_ITEM_WORDS[one.item]} />
+                      </strong>
+                    }
+                    note={called.includes(one.item) ? 'said in the call-out' : howAsked(one)}
+                    disabled={called.includes(one.item)}
+                    checked={called.includes(one.item) || stated.includes(one.item)}
                     onChange={() => bench.set({ stated: toggled(stated, one.item) })}
                   />
                   <p className="pb-1 pl-7 text-source text-quiet">{whereAsked(one)}</p>
@@ -88,13 +103,17 @@ export function OrderChecklist({ number, rest, bench }: OrderChecklistProps) {
   );
 }
 
+const Capital = ({ says }: { says: string }) => (
+  <span className="inline-block first-letter:uppercase">{says}</span>
+);
+
 const howAsked = ({ kind, otherwise }: ChecklistItem): string =>
   `${ORDERING_KIND_WORDS[kind]}${otherwise === undefined ? '' : `; otherwise ${otherwise}`}`;
 
 const whereAsked = ({ issue, paragraph, source }: ChecklistItem): string =>
   [
     sourceWords(source),
-    ...(issue === null ? [] : [`read in issue ${issue}`]),
+    ...(issue === null ? [] : [`of issue ${issue}`]),
     ...(paragraph === null ? [] : [`paragraph ${paragraph}`]),
   ].join('; ');
 

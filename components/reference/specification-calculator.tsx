@@ -46,7 +46,7 @@ export function SpecificationCalculator({ given }: { given: Given }) {
       <BenchFieldRow label="Call-out">
         <TextField
           label="Specification, as the drawing calls it"
-          className="wide max-sm:col-span-2"
+          className="wider max-sm:col-span-2"
           autoComplete="off"
           mono
           {...bench.choice('specification')}
@@ -84,7 +84,7 @@ function Called({ bench }: { bench: Bench<keyof typeof FIELDS> }) {
       {isBritish ? <BritishMaterial number={read.number} /> : <Standing asked={asked} />}
       <CallOut asked={asked} rest={read.rest} />
       <Lineage asked={asked} onLook={(specification) => bench.set({ specification })} />
-      <OrderChecklist number={read.number} rest={read.rest} bench={bench} />
+      <OrderChecklist called={read} bench={bench} />
     </>
   );
 }

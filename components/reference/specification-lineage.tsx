@@ -8,7 +8,14 @@ import { alternativesTo, successorsOf } from '@/lib/trade/lineage/successors-of'
 import { SPECIFICATION_LINEAGE } from '@/lib/trade/tables/specification-lineage';
 
 import { SourceLine } from './source-line';
-import { AUTHORITY_WORDS, COVERAGE_WORDS, dateWords, EVENT_WORDS, type Asked } from './specification-words';
+import {
+  AUTHORITY_WORDS,
+  COVERAGE_WORDS,
+  dateWords,
+  EVENT_WORDS,
+  type Asked,
+  whenWords,
+} from './specification-words';
 
 /** What followed a specification, who sees it otherwise, and all that is recorded of it. */
 export function Lineage({ asked, onLook }: { asked: Asked; onLook: (number: string) => void }) {
@@ -21,7 +28,7 @@ export function Lineage({ asked, onLook }: { asked: Asked; onLook: (number: stri
     <>
       {listed.ok && (
         <p>
-          By {AUTHORITY_WORDS.government_index} it {EVENT_WORDS[listed.standing]} {dateWords(listed.since)}.
+          By {AUTHORITY_WORDS.government_index} it {EVENT_WORDS[listed.standing]} {whenWords(listed.since)}.
         </p>
       )}
       {next.ok && (
@@ -34,7 +41,7 @@ export function Lineage({ asked, onLook }: { asked: Asked; onLook: (number: stri
                 {one.last && ', which stands now as far as is recorded'}
                 <span className="block text-second">
                   {one.after} {EVENT_WORDS[one.event]}
-                  {one.on !== null && ` ${dateWords(one.on)}`}
+                  {one.on !== null && ` ${whenWords(one.on)}`}
                   {one.by !== 'publisher' && `, by ${AUTHORITY_WORDS[one.by]}`}
                   {forWords(one)}
                 </span>

@@ -64,7 +64,7 @@ export function standingReply(
   if (!stands.ok) return null;
   const { standing, since, revision } = stands;
   const next = successorsOf(table, number, covers);
-  const words = `${EVENT_WORDS[standing]} ${dateWords(since)}`;
+  const words = `${EVENT_WORDS[standing]} ${whenWords(since)}`;
   if (!ENDED.includes(standing))
     return {
       good: FADING.includes(standing) ? null : true,
@@ -109,3 +109,6 @@ export function dateWords(on: string): string {
     year,
   ].join(' ');
 }
+
+/** `in 1997`, `in Jul 1997`, `on 1 Jul 1997`. */
+export const whenWords = (on: string): string => `${on.length > 7 ? 'on' : 'in'} ${dateWords(on)}`;

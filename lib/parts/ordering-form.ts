@@ -4,7 +4,7 @@ import { missingItems } from '@/lib/trade/ordering/missing-items';
 import type { OrderItem } from '@/lib/trade/ordering/order-item';
 import { orderingChecklist, type ChecklistItem } from '@/lib/trade/ordering/ordering-checklist';
 
-import { orderFactsOf } from './order-facts';
+import { orderFactsOf, orderItemsOf } from './order-facts';
 import { statedItems, type OrderingAnswers } from './ordering-answers';
 import { statedByRequirements } from './stated-by-requirements';
 import { strengthRangeOf } from './strength-of';
@@ -73,13 +73,8 @@ function saidByFields({
   conditionBefore,
   targetCondition,
 }: OrderedStep): OrderItem[] {
-  const says = (item: OrderItem, word: RegExp): OrderItem[] => (word.test(classType) ? [item] : []);
   return [
-    ...says('type', /\btype\b/i),
-    ...says('class', /\bclass\b/i),
-    ...says('grade', /\bgrade\b/i),
-    ...says('method', /\bmethod\b/i),
-    ...says('sensitivity', /\blevel\b/i),
+    ...orderItemsOf(classType),
     ...(/\d\/\d/.test(specification) ? (['slash_sheet'] as const) : []),
     ...(conditionBefore === '' ? [] : (['condition_before'] as const)),
     ...(targetCondition === '' ? [] : (['condition_after'] as const)),

@@ -12,14 +12,14 @@ const asked = (number: string, more: { revision?: string; on?: string } = {}) =>
 const stands = (...of: Parameters<typeof asked>) => standingReply(SPECIFICATION_LINEAGE, asked(...of));
 
 test('a superseded number is said to be so, with its day and what stands in its place at the end', () => {
-  expect(stands('MIL-H-6088')).toMatchObject({ good: false, says: 'MIL-H-6088 was superseded Jul 1997' });
+  expect(stands('MIL-H-6088')).toMatchObject({ good: false, says: 'MIL-H-6088 was superseded in Jul 1997' });
   expect(stands('MIL-H-6088')?.rest).toContain('AMS2770');
 });
 
 test('before that day it stood', () => {
   expect(stands('MIL-H-6088', { on: '1995-01-01' })).toMatchObject({
     good: true,
-    says: 'MIL-H-6088 was issued 1 Apr 1991',
+    says: 'MIL-H-6088 was issued on 1 Apr 1991',
   });
 });
 
