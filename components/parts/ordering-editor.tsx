@@ -6,19 +6,11 @@ import { Button } from '@/components/ui/button';
 import { TextField } from '@/components/ui/field';
 import { sourceWords } from '@/lib/batches/source-words';
 import { orderingForm } from '@/lib/parts/ordering-form';
+import { ORDERING_KIND_WORDS } from '@/lib/reference/ordering-words';
 import { PART_TABLES } from '@/lib/reference/published-tables';
 import { ORDER_ITEM_WORDS } from '@/lib/trade/ordering/order-item';
-import type { ChecklistItem } from '@/lib/trade/ordering/ordering-checklist';
 import type { PartValues } from './part-form-values';
 import { useTypedRoute } from './use-typed-part';
-
-const HOW: Record<ChecklistItem['kind'], string> = {
-  must_state: 'must be stated',
-  must_be_agreed: 'must be agreed',
-  should_state: 'should be stated',
-  state_or_default: 'may be stated',
-  default: 'may be stated',
-};
 
 /** What the specification asks the order to state, as fields; what is missing is named even while they are folded. */
 export function OrderingEditor({ at }: { at: number }) {
@@ -65,7 +57,7 @@ export function OrderingEditor({ at }: { at: number }) {
               key={item}
               label={<span className="first-letter:uppercase">{ORDER_ITEM_WORDS[item]}</span>}
               autoComplete="off"
-              hint={`${HOW[kind]}${otherwise ? `; otherwise ${otherwise}` : ''}. ${sourceWords(source)}`}
+              hint={`${ORDERING_KIND_WORDS[kind]}${otherwise ? `; otherwise ${otherwise}` : ''}. ${sourceWords(source)}`}
               error={formState.errors.route?.[at]?.ordering?.[item]?.message}
               {...register(`route.${at}.ordering.${item}`)}
             />

@@ -20,7 +20,7 @@ const NOTES: Partial<Record<OrderRuleId, string>> = {
   special_cleaning: 'steel this strong is cleaned without acid before plating',
 };
 
-export function findingWords({ rule }: RouteFinding): string {
+export function ruleWords(rule: OrderRuleId): string {
   const words = ROUTE_RULE_WORDS[rule] ?? NOTES[rule] ?? rule.replaceAll('_', ' ');
   return `${words.charAt(0).toUpperCase()}${words.slice(1)}.`;
 }

@@ -42,7 +42,7 @@ export function BenchFieldRow({ children, label }: { children: ReactNode; label:
     <div
       role="group"
       aria-label={label}
-      className="grid grid-cols-2 items-start gap-x-3.5 gap-y-3 pt-2.5 sm:flex sm:flex-wrap [&>*]:sm:w-32 [&>.wide]:sm:w-52"
+      className="grid grid-cols-2 items-start gap-x-3.5 gap-y-3 pt-2.5 sm:flex sm:flex-wrap [&>*]:sm:w-32 [&>.wide]:sm:w-52 [&>.wider]:sm:w-80"
     >
       {children}
     </div>

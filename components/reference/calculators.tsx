@@ -11,8 +11,10 @@ import { HoldingCalculator } from './holding-calculator';
 import { LoadCalculator } from './load-calculator';
 import { MassCalculator } from './mass-calculator';
 import { PyrometryCalculator } from './pyrometry-calculator';
+import { RouteCalculator } from './route-calculator';
 import { SampleCalculator } from './sample-calculator';
 import { SoakCalculator } from './soak-calculator';
+import { SpecificationCalculator } from './specification-calculator';
 import { SteelCalculator } from './steel-calculator';
 import type { Subject } from './subjects';
 import { TemperCalculator } from './temper-calculator';
@@ -27,6 +29,8 @@ export const CALCULATORS: Record<Subject, ComponentType<{ given: Given }>> = {
   temper: TemperCalculator,
   hardness: HardnessCalculator,
   acceptance: AcceptanceCalculator,
+  specification: SpecificationCalculator,
+  route: RouteCalculator,
   finish: BuildUpCalculator,
   bake: BakeCalculator,
   samples: SampleCalculator,

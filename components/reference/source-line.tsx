@@ -1,18 +1,12 @@
+import { sourceWords } from '@/lib/batches/source-words';
 import type { Source } from '@/lib/trade/source';
 import type { TableReference } from '@/lib/trade/table';
-
-export const HOW_FOUND: Record<Source['confidence'], string> = {
-  read: 'read in the source',
-  'read+memory': 'partly read, partly from memory',
-  computed: 'worked out from the published rule',
-  memory: 'from memory, to be checked against your copy',
-};
 
 /** Where a value comes from, how it was obtained and how far we trust it. Ends whatever shows a reference value. */
 export function SourceLine({ source, readFrom }: { source: Source; readFrom?: TableReference | undefined }) {
   return (
-    <p className="pt-2 text-source text-quiet">
-      {source.document}; {HOW_FOUND[source.confidence]}; {source.certainty} trust.
+    <p className="pt-2 text-source [overflow-wrap:anywhere] text-quiet">
+      {sourceWords(source)}.{source.confidence === 'memory' && ' Check it against your own copy.'}
       {readFrom && !source.document.includes(readFrom.edition) && ` Table: ${readFrom.edition}.`}
       {source.address !== undefined && ` Seen at ${source.address}.`}
     </p>

@@ -1,10 +1,9 @@
 import type { ReactNode } from 'react';
 
 import { Numbers } from '@/components/plots/numbers';
+import { sourceWords } from '@/lib/batches/source-words';
 import type { Source } from '@/lib/trade/source';
 import type { Table } from '@/lib/trade/table';
-
-import { HOW_FOUND } from './source-line';
 
 interface SourcedTableProps<Row> {
   table: Table<Row>;
@@ -24,9 +23,5 @@ export function SourcedTable<Row>({ table, heads, cells }: SourcedTableProps<Row
 }
 
 function RowSource({ source }: { source: Source }) {
-  return (
-    <span className="block min-w-64 font-sans text-source text-quiet">
-      {source.document}; {HOW_FOUND[source.confidence]}; {source.certainty} trust
-    </span>
-  );
+  return <span className="block min-w-64 font-sans text-source text-quiet">{sourceWords(source)}</span>;
 }

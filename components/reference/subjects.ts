@@ -8,6 +8,8 @@ export const SUBJECTS = {
   temper: 'Which temper from which',
   hardness: 'Hardness conversion',
   acceptance: 'Hardness and conductivity',
+  specification: 'Specifications',
+  route: 'Order of steps',
   finish: 'Build-up of a finish',
   bake: 'Bake after plating',
   samples: 'Samples to take',

@@ -1,9 +1,10 @@
 import type { PartTables } from '@/lib/reference/published-tables';
 import { recogniseSpecification } from '@/lib/trade/lineage/recognise-specification';
 import { missingItems } from '@/lib/trade/ordering/missing-items';
-import type { OrderFact, OrderItem } from '@/lib/trade/ordering/order-item';
+import type { OrderItem } from '@/lib/trade/ordering/order-item';
 import { orderingChecklist, type ChecklistItem } from '@/lib/trade/ordering/ordering-checklist';
 
+import { orderFactsOf, orderItemsOf } from './order-facts';
 import { statedItems, type OrderingAnswers } from './ordering-answers';
 import { statedByRequirements } from './stated-by-requirements';
 import { strengthRangeOf } from './strength-of';
@@ -43,7 +44,7 @@ export function orderingForm(
 ): OrderingForm | null {
   const read = recogniseSpecification(step.specification);
   if (!read) return null;
-  const facts = factsOf(step.classType);
+  const facts = orderFactsOf(step.classType);
   const checklist = orderingChecklist(ordering, read.number, facts);
   if (!checklist.ok) return null;
   const elsewhere = new Set([...STATED_ELSEWHERE, ...saidByFields(step)]);
@@ -72,24 +73,10 @@ function saidByFields({
   conditionBefore,
   targetCondition,
 }: OrderedStep): OrderItem[] {
-  const says = (item: OrderItem, word: RegExp): OrderItem[] => (word.test(classType) ? [item] : []);
   return [
-    ...says('type', /\btype\b/i),
-    ...says('class', /\bclass\b/i),
-    ...says('grade', /\bgrade\b/i),
-    ...says('method', /\bmethod\b/i),
-    ...says('sensitivity', /\blevel\b/i),
+    ...orderItemsOf(classType),
     ...(/\d\/\d/.test(specification) ? (['slash_sheet'] as const) : []),
     ...(conditionBefore === '' ? [] : (['condition_before'] as const)),
     ...(targetCondition === '' ? [] : (['condition_after'] as const)),
-  ];
-}
-
-function factsOf(classType: string): OrderFact[] {
-  const is = (fact: OrderFact, word: RegExp): OrderFact[] => (word.test(classType) ? [fact] : []);
-  return [
-    ...is('class_2', /\bclass\s*2\b/i),
-    ...is('class_3', /\bclass\s*3\b/i),
-    ...is('type_iii', /\btype\s*(?:iii|3)\b/i),
   ];
 }

@@ -2,7 +2,7 @@ import type { PartTables } from '@/lib/reference/published-tables';
 import { PROCESSES, type Process } from '@/lib/trade/process';
 import { checkRoute } from '@/lib/trade/route/check-route';
 import { repairRoute } from '@/lib/trade/route/repair-route';
-import type { RouteFinding } from '@/lib/trade/route/route';
+import type { RouteFinding, RoutePart, RouteTables } from '@/lib/trade/route/route';
 
 import type { MaterialOf } from './material-of';
 import { routePartOf } from './route-part-of';
@@ -39,18 +39,26 @@ export function checkTypedRoute(
   typed: readonly TypedStep[],
 ): CheckedRoute {
   if (of.known !== 'yes') return { findings: [], repaired: null };
+  return checkTypedSteps(tables.route, routePartOf(tables.phConditions, of.material, endCondition), typed);
+}
+
+/** The same for a part of which everything that the rules ask for is said. */
+export function checkTypedSteps(
+  tables: RouteTables,
+  part: RoutePart,
+  typed: readonly TypedStep[],
+): CheckedRoute {
   const route = typed.flatMap((step, at) => {
     const process = PROCESSES.find((one) => one === step.process);
     return process ? [{ ...step, process, revision: step.specificationRevision, at }] : [];
   });
-  const part = routePartOf(tables.phConditions, of.material, endCondition);
-  const found = checkRoute(tables.route, route, part);
+  const found = checkRoute(tables, route, part);
   const findings = found.map((finding) => ({
     ...finding,
     steps: finding.steps.flatMap((step) => route[step]?.at ?? []),
   }));
   if (!found.some(({ repair }) => repair)) return { findings, repaired: null };
-  const repair = repairRoute(tables.route, route, part);
+  const repair = repairRoute(tables, route, part);
   const steps = repair.route.map((step): RepairedStep => {
     const known = route.find((one) => one === step);
     return known ? { is: 'typed', at: known.at } : { is: 'new', process: step.process };

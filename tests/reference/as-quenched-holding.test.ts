@@ -3,6 +3,7 @@ import { describe, expect, test } from 'vitest';
 
 import { dryIceFor } from '@/lib/trade/heat-treat/dry-ice';
 import { holdingClock, type ColdStay } from '@/lib/trade/heat-treat/holding-clock';
+import { timeLeft } from '@/lib/trade/heat-treat/time-left';
 import { reworkWindow, rivetHolding } from '@/lib/trade/heat-treat/working-windows';
 import { DRY_ICE } from '@/lib/trade/tables/dry-ice';
 import { HOLDING_LIMITS, REWORK_WINDOWS, RIVET_HOLDING } from '@/lib/trade/tables/holding-limits';
@@ -176,5 +177,38 @@ describe('dry ice', () => {
       reason: 'too_much_for_one_package',
     });
     expect(dryIceFor(DRY_ICE, { hours: -1, by: 'air_freight' })).toMatchObject({ reason: 'hours_negative' });
+  });
+});
+
+describe('what is left of a time', () => {
+  const span = { begins: at(0), ends: at(15) };
+  const state = (min: number) => timeLeft(span, at(min)).state;
+
+  test('of 15 min the last three warn; at the end it is over', () =>
+    expect([-1, 0, 11, 12, 14, 15, 20].map(state)).toEqual([
+      'not_begun',
+      'running',
+      'running',
+      'near_end',
+      'near_end',
+      'over',
+      'over',
+    ]));
+
+  test('of 90 days only the last day warns', () => {
+    const cold = { begins: at(0), ends: at(90 * DAY) };
+    expect(timeLeft(cold, at(89 * DAY - 1)).state).toBe('running');
+    expect(timeLeft(cold, at(89 * DAY)).state).toBe('near_end');
+  });
+
+  test('what is left never grows, and what is over never shrinks', () => {
+    fc.assert(
+      fc.property(fc.integer({ min: -60, max: 60 }), fc.integer({ min: 0, max: 60 }), (first, later) => {
+        const [before, after] = [timeLeft(span, at(first)), timeLeft(span, at(first + later))];
+        expect(after.leftMs).toBeLessThanOrEqual(before.leftMs);
+        expect(after.overMs).toBeGreaterThanOrEqual(before.overMs);
+        expect(after.leftMs - after.overMs).toBe(span.ends.getTime() - at(first + later).getTime());
+      }),
+    );
   });
 });

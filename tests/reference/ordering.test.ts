@@ -3,7 +3,7 @@ import { describe, expect, test } from 'vitest';
 
 import { commonlyMissing, missingItems } from '@/lib/trade/ordering/missing-items';
 import { ORDER_FACTS, ORDER_ITEM_WORDS, ORDER_ITEMS, type OrderItem } from '@/lib/trade/ordering/order-item';
-import { orderingChecklist } from '@/lib/trade/ordering/ordering-checklist';
+import { factsAskedFor, orderingChecklist } from '@/lib/trade/ordering/ordering-checklist';
 import { promisedOn, workDaysTogether } from '@/lib/trade/ordering/promised-on';
 import { MISSING_ITEMS } from '@/lib/trade/tables/missing-items';
 import { ORDERING_INFORMATION } from '@/lib/trade/tables/ordering-information';
@@ -175,5 +175,17 @@ describe('when work is due', () => {
     expect(promisedOn({ ...asked, receivedOn: '2026-02-30' })).toEqual({ ok: false, reason: 'not_a_date' });
     expect(promisedOn({ ...asked, workDays: 0 })).toEqual({ ok: false, reason: 'days_not_whole' });
     expect(workDaysTogether([1.5])).toEqual({ ok: false, reason: 'days_not_whole' });
+  });
+});
+
+describe('what has to be known of an order before its list is whole', () => {
+  test('of MIL-DTL-5541: whether it is Class 3; of AMS2700: fasteners, and a drawing that says QQ-P-35', () => {
+    expect(factsAskedFor(ORDERING_INFORMATION, 'MIL-DTL-5541')).toEqual(['class_3']);
+    expect(factsAskedFor(ORDERING_INFORMATION, 'AMS2700')).toEqual(['fasteners', 'qq_p_35_on_drawing']);
+  });
+
+  test('nothing of a specification that asks the same of every order, and of one that is not recorded', () => {
+    expect(factsAskedFor(ORDERING_INFORMATION, 'AMS2770')).toEqual([]);
+    expect(factsAskedFor(ORDERING_INFORMATION, 'AMS9999')).toEqual([]);
   });
 });

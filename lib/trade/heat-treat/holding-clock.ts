@@ -16,6 +16,8 @@ export interface ColdStay {
 
 export interface HoldingClock {
   readonly where: 'at_room_temperature' | 'in_the_cold';
+  /** Since when it is there. */
+  readonly since: Date;
   /** Until then it keeps; after it, it has to be treated again or aged as it is. */
   readonly endsAt: Date;
   readonly roomLimitMin: number;
@@ -63,6 +65,7 @@ export function holdingClock(
   return {
     ok: true,
     where: isCold ? 'in_the_cold' : 'at_room_temperature',
+    since: last.since,
     endsAt: new Date(last.since.getTime() + leftMin * MS_PER_MIN),
     roomLimitMin: row.roomMin,
     roomUsedMin,

@@ -2,7 +2,7 @@ import type { Source } from '../source';
 import { referenceTo, type Table } from '../table';
 import type { Verdict } from '../verdict';
 
-import type { OrderFact, OrderItem } from './order-item';
+import { ORDER_FACTS, type OrderFact, type OrderItem } from './order-item';
 
 /** How firmly a specification asks. `default` only tells what applies when the order says nothing. */
 export type OrderingKind = 'must_state' | 'must_be_agreed' | 'should_state' | 'state_or_default' | 'default';
@@ -45,10 +45,7 @@ export function orderingChecklist(
   number: string,
   facts: readonly OrderFact[],
 ): Verdict<{ items: readonly ChecklistItem[] }, 'not_known'> {
-  const family = number.replace(/(^AMS\d+)\/.*/, '$1');
-  const rows = table.rows.filter(({ specifications }) =>
-    specifications.some((one) => one === number || one === family),
-  );
+  const rows = rowsFor(table, number);
   const [first] = rows;
   if (!first) return { ok: false, reason: 'not_known' };
   const items = new Map<OrderItem, ChecklistItem>();
@@ -59,6 +56,19 @@ export function orderingChecklist(
       items.set(ask.item, firmer(items.get(ask.item), one));
     }
   return { ok: true, items: [...items.values()], source: first.source, readFrom: referenceTo(table) };
+}
+
+/** What would make the specification ask for more, or otherwise: to be said of an order before its list is whole. */
+export const factsAskedFor = (table: Table<OrderingRow>, number: string): OrderFact[] => {
+  const asks = rowsFor(table, number).flatMap((row) => row.asks);
+  return ORDER_FACTS.filter((fact) => asks.some(({ when }) => when === fact));
+};
+
+function rowsFor(table: Table<OrderingRow>, number: string) {
+  const family = number.replace(/(^AMS\d+)\/.*/, '$1');
+  return table.rows.filter(({ specifications }) =>
+    specifications.some((one) => one === number || one === family),
+  );
 }
 
 const FIRMNESS: readonly OrderingKind[] = [

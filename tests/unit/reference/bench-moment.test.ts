@@ -1,6 +1,15 @@
 import { expect, test } from 'vitest';
 
-import { momentWords, readMoment, spanWords } from '@/components/reference/bench-moment';
+import {
+  countdownWords,
+  fieldMoment,
+  momentWords,
+  onTheWall,
+  readMoment,
+  spanWords,
+  zoneWords,
+} from '@/components/reference/bench-moment';
+import { readZone } from '@/components/reference/holding-fields';
 
 test('a moment is read and said by the same clock', () => {
   const at = readMoment('2026-12-01T14:10');
@@ -17,3 +26,30 @@ test.each([
 ])('%i minutes are %s', (minutes, says) => {
   expect(spanWords(minutes)).toBe(says);
 });
+
+test.each([
+  [0, '0:00'],
+  [1, '0:01'],
+  [725_000, '12:05'],
+  [3_599_001, '1 h'],
+  [9_000_000, '2 h 30 min'],
+])('%i ms left are %s', (ms, says) => {
+  expect(countdownWords(ms)).toBe(says);
+});
+
+test('a moment is put on the wall of a zone, and into a field by the minute it lies in', () => {
+  const at = new Date('2026-12-01T19:10:59Z');
+  expect(fieldMoment(onTheWall(at, -300))).toBe('2026-12-01T14:10');
+  expect(fieldMoment(onTheWall(at, 330))).toBe('2026-12-02T00:40');
+});
+
+test.each([
+  ['-300', -300, 'UTC−5'],
+  ['330', 330, 'UTC+5:30'],
+  ['0', 0, 'UTC+0'],
+])('the zone %s of an address is read and said', (typed, zone, says) => {
+  expect(readZone(typed)).toBe(zone);
+  expect(zoneWords(zone)).toBe(says);
+});
+
+test.each(['', 'x?', '9999', '1e3', '841'])('%j is no zone', (typed) => expect(readZone(typed)).toBeNull());
