@@ -12,6 +12,7 @@ import { useRef } from 'react';
 import { ApiError, call } from '@/lib/api/client';
 import type { Declaration, InputOf, OutputOf } from '@/lib/api/endpoint';
 import { queryKeyOf } from '@/lib/api/query-key';
+import { listAudit } from '@/lib/audit/contract';
 import { getWaiting } from '@/lib/tideline/contract';
 
 const optionsOf = <D extends Declaration>(declaration: D, input: InputOf<D>) => ({
@@ -89,8 +90,9 @@ export function useWrite<D extends Declaration>(
       count < 3 && error instanceof ApiError && [0, 503].includes(error.problem.status),
     retryDelay: (count) => 400 * 2 ** count,
     onSuccess: () => {
-      // Nearly every write changes what waits for somebody; the figures in the head follow without being waited for.
+      // Every write is recorded and nearly every one changes what waits for somebody; both follow without being waited for.
       void cache.invalidateQueries({ queryKey: [getWaiting.id] });
+      void cache.invalidateQueries({ queryKey: [listAudit.id] });
       return Promise.all(
         (options.refreshes ?? []).map((read) => cache.invalidateQueries({ queryKey: [read.id] })),
       );

@@ -10,8 +10,11 @@ import { SpotForm, typedCount, type SpotFormIn, type SpotFormOut } from '@/compo
 import { Button } from '@/components/ui/button';
 import { SelectField } from '@/components/ui/field';
 import { showMessage } from '@/components/ui/message';
+import type { ApiError } from '@/lib/api/client';
 import { getAssembly, listAssemblies, type AssemblyNeedRow } from '@/lib/assemblies/contract';
-import { getStockSpot, listLocations, listStock, takeOutPieces } from '@/lib/stock/contract';
+import { fitPieces, getStockSpot, listLocations, listStock, takeOutPieces } from '@/lib/stock/contract';
+
+const REFRESHES = [getAssembly, listAssemblies, listStock, getStockSpot, listLocations];
 
 interface TakeOutProps {
   lot: AssemblyNeedRow['fittedLots'][number];
@@ -58,9 +61,8 @@ function TakeOutForm({ lot, assembly, onDone }: Omit<TakeOutProps, 'may'> & { on
     resolver: zodResolver(SpotForm),
     defaultValues: { isNamed: lot.named.length > 0, pieces: String(lot.pieces), names: [], to: '' },
   });
-  const write = useWrite(takeOutPieces, {
-    refreshes: [getAssembly, listAssemblies, listStock, getStockSpot, listLocations],
-  });
+  const write = useWrite(takeOutPieces, { refreshes: REFRESHES });
+  const fit = useWrite(fitPieces, { refreshes: REFRESHES });
   const typed = useWatch({ control: form.control });
   const count = typedCount({
     isNamed: typed.isNamed ?? false,
@@ -70,17 +72,23 @@ function TakeOutForm({ lot, assembly, onDone }: Omit<TakeOutProps, 'may'> & { on
   const { errors } = form.formState;
   const submit = form.handleSubmit(async ({ to, ...rest }) => {
     if (to === '') return form.setError('to', { type: 'local', message: 'Choose the place they go to.' });
+    const moved = { lotId: lot.lotId, assemblyId: assembly.id, locationId: to, ...rest };
     const done = await write
-      .mutateAsync(
-        { lotId: lot.lotId, assemblyId: assembly.id, locationId: to, ...rest },
-        {
-          onError: ({ problem }) =>
-            form.setError('root', { type: 'server', message: problem.fields?.[0]?.message ?? problem.title }),
-        },
-      )
+      .mutateAsync(moved, {
+        onError: ({ problem }) =>
+          form.setError('root', { type: 'server', message: problem.fields?.[0]?.message ?? problem.title }),
+      })
       .catch(() => null);
     if (!done) return;
-    showMessage({ says: `${rest.pieces} of ${lot.lotNumber} taken out of ${assembly.name}.` });
+    const undo = () =>
+      fit.mutateAsync(moved).then(
+        () => showMessage({ says: `${rest.pieces} of ${lot.lotNumber} are back in ${assembly.name}.` }),
+        (error: ApiError) => showMessage({ says: error.message, failed: true }),
+      );
+    showMessage({
+      says: `${rest.pieces} of ${lot.lotNumber} taken out of ${assembly.name}.`,
+      action: { says: 'Undo', run: undo },
+    });
     onDone();
   });
   return (

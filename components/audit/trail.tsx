@@ -9,8 +9,9 @@ import { Failing } from '@/components/ui/failing';
 import { Loading } from '@/components/ui/loading';
 import { Cell, Row, Table } from '@/components/ui/table';
 import type { InputOf } from '@/lib/api/endpoint';
+import { actionWords } from '@/lib/audit/action-words';
 import { listAudit, type AuditEntry } from '@/lib/audit/contract';
-import { actionWords, changesBetween, jobWords, kindWords, pageOfThing } from '@/lib/audit/words';
+import { changesBetween, jobWords, kindWords, pageOfThing } from '@/lib/audit/words';
 
 interface TrailProps {
   asked: InputOf<typeof listAudit>;

@@ -1,6 +1,6 @@
 'use client';
 
-import type { ReactNode } from 'react';
+import { useEffect, type ReactNode } from 'react';
 import { FileDrop } from '@/components/ui/file-drop';
 import { acceptedFiles } from '@/lib/files/kinds';
 import type { FileView } from '@/lib/files/contract';
@@ -21,6 +21,8 @@ interface FileUploadProps {
   onArrived: (file: FileView) => void;
   /** An arrived file that is taken off the list again; without it, arrived files stay. */
   onRemoved?: (file: FileView) => void;
+  /** Whether files are still on their way: a form that was sent now would leave without them. */
+  onUnderWay?: (isUnderWay: boolean) => void;
   /** What the form that takes the file says against it. */
   error?: string | undefined;
 }
@@ -35,12 +37,15 @@ export function FileUpload({
   camera = false,
   onArrived,
   onRemoved,
+  onUnderWay,
   error,
 }: FileUploadProps) {
   const { uploads, add, again, takeSame, remove } = useUploads(
     { purpose, ...(batchId === undefined ? {} : { batchId }) },
     onArrived,
   );
+  const isUnderWay = uploads.some(({ state }) => state !== 'arrived' && state !== 'refused');
+  useEffect(() => onUnderWay?.(isUnderWay), [isUnderWay, onUnderWay]);
   const takes = multiple || uploads.every(({ state }) => state === 'refused');
 
   return (

@@ -20,7 +20,7 @@ export function UploadRow({ upload, onAgain, onUseSame, onRemove, removable }: U
   const isUnderWay = state === 'waiting' || state === 'sending' || state === 'checking';
   return (
     <li
-      className={`border-b border-rule py-2 ${refusal ? 'border-l-4 border-l-held bg-held-wash pl-3' : ''}`}
+      className={`border-b border-rule py-2 ${refusal ? 'border-l-4 border-l-held bg-held-wash px-3' : ''}`}
     >
       <div className="flex flex-wrap items-center gap-x-4 gap-y-1">
         <div className="min-w-0 flex-1 basis-60">

@@ -61,6 +61,7 @@ function LotForm({ part, onPick }: { part: PickedPart | null; onPick: (part: Pic
     },
   });
   const { errors, isSubmitting } = form.formState;
+  const [sending, setSending] = useState(false);
   const serials = serialsIn(useWatch({ control: form.control, name: 'serials' }));
 
   const submit = form.handleSubmit(async (values) => {
@@ -155,13 +156,20 @@ function LotForm({ part, onPick }: { part: PickedPart | null; onPick: (part: Pic
               hint="PDF, PNG, JPEG or TIFF, at most 50 MB"
               onArrived={({ id }) => form.setValue('millCertificateFileId', id)}
               onRemoved={() => form.setValue('millCertificateFileId', null)}
+              onUnderWay={setSending}
               error={errors.millCertificateFileId?.message}
             />
           </Section>
         }
       />
       <div className="mt-6 flex flex-wrap gap-2.5 border-t-heavy border-ink pt-4">
-        <Button type="submit" look="primary" busy={isSubmitting} busyLabel="Adding">
+        <Button
+          type="submit"
+          look="primary"
+          busy={isSubmitting}
+          busyLabel="Adding"
+          notNow={sending && 'The mill certificate is still on its way.'}
+        >
           Add the lot
         </Button>
         <ButtonLink href="/lots">Leave without keeping</ButtonLink>

@@ -22,36 +22,43 @@ import {
   type NonconformanceDetail,
 } from '@/lib/nonconformances/contract';
 import { DISPOSITIONS, type Disposition } from '@/lib/nonconformances/disposition';
+import { faultsOfDisposition } from '@/lib/nonconformances/faults-of-disposition';
 
 import { buttonWords, choiceOf } from './disposition-words';
 
 const Fields = z.object({
   disposition: z.enum(DISPOSITIONS, 'Choose what becomes of the pieces.'),
   pieces: piecesField('Pieces').pipe(z.number().min(1, 'Enter 1 or more.')),
-  reason: z.string().trim().min(1, 'Say why.').max(500, 'Write 500 characters or less.'),
   authority: z.string().trim().max(200, 'Write 200 characters or less.'),
+  fileId: z.string().nullable(),
+  reason: z.string().trim().min(1, 'Say why.').max(500, 'Write 500 characters or less.'),
   pieceIds: list(z.string()),
 });
 type FieldsIn = z.input<typeof Fields>;
 type FieldsOut = z.output<typeof Fields>;
 
+/** Everything that is missing is said at once. How many are still away only the server knows. */
+const fieldsOf = ({ kind, serialised, pieces, decided }: NonconformanceDetail) =>
+  Fields.superRefine((values, ctx) => {
+    const about = { kind, serialised, left: pieces - decided, away: pieces };
+    for (const { field, message } of faultsOfDisposition(values, about))
+      ctx.addIssue({ code: 'custom', path: [field], message });
+  });
+
 /** Decides about some or all of the pieces that are left. */
 export function DispositionForm({ nonconformance }: { nonconformance: NonconformanceDetail }) {
   const { id, kind, version, serialised, heldPieces } = nonconformance;
   const left = nonconformance.pieces - nonconformance.decided;
-  const [fileId, setFileId] = useState<string | null>(null);
+  const [sending, setSending] = useState(false);
   const [asking, setAsking] = useState<FieldsOut | null>(null);
   const form = useForm<FieldsIn, unknown, FieldsOut>({
-    resolver: zodResolver(Fields),
-    defaultValues: { pieces: String(left), reason: '', authority: '', pieceIds: [] },
+    resolver: zodResolver(fieldsOf(nonconformance)),
+    defaultValues: { pieces: String(left), reason: '', authority: '', fileId: null, pieceIds: [] },
   });
   const write = useWrite(disposeNonconformance, { refreshes: [getNonconformance, listNonconformances] });
   const [disposition, pieces] = useWatch({ control: form.control, name: ['disposition', 'pieces'] });
   const rule = ruleOf(kind, disposition);
   const { errors, isSubmitting } = form.formState;
-  // What is not a field of this form is said above its button.
-  const elsewhere =
-    errors.root?.message ?? (errors as Record<string, { message?: string } | undefined>)['fileId']?.message;
 
   const decide = async (values: FieldsOut) => {
     const pieceIds = serialised && rule?.to !== null ? values.pieceIds : [];
@@ -63,7 +70,7 @@ export function DispositionForm({ nonconformance }: { nonconformance: Nonconform
           ...values,
           pieceIds,
           authority: rule?.authority ? values.authority : '',
-          fileId: rule?.file ? fileId : null,
+          fileId: rule?.file ? values.fileId : null,
         },
         { onError: showOnForm(form) },
       )
@@ -128,14 +135,18 @@ export function DispositionForm({ nonconformance }: { nonconformance: Nonconform
           batchId={nonconformance.batchId}
           label="The concession"
           hint="PDF or picture, up to 50 MB"
-          onArrived={(file) => setFileId(file.id)}
-          onRemoved={() => setFileId(null)}
+          onArrived={(file) =>
+            form.setValue('fileId', file.id, { shouldValidate: form.formState.isSubmitted })
+          }
+          onRemoved={() => form.setValue('fileId', null)}
+          onUnderWay={setSending}
+          error={errors.fileId?.message}
         />
       )}
       <TextArea label="Reason" rows={2} error={errors.reason?.message} {...form.register('reason')} />
-      {elsewhere && (
+      {errors.root?.message && (
         <p role="alert" className="font-medium text-held-ink">
-          {elsewhere}
+          {errors.root.message}
         </p>
       )}
       <span>
@@ -144,7 +155,10 @@ export function DispositionForm({ nonconformance }: { nonconformance: Nonconform
           type="submit"
           busy={isSubmitting || write.isPending}
           busyLabel="Deciding"
-          notNow={isDisposition(disposition) ? undefined : 'Choose first what becomes of them.'}
+          notNow={
+            (!isDisposition(disposition) && 'Choose first what becomes of them.') ||
+            (sending && 'The paper is still on its way.')
+          }
         >
           {isDisposition(disposition) ? words(String(pieces)) : 'Decide'}
         </Button>

@@ -9,7 +9,13 @@ import { Section } from '@/components/ui/section';
 import type { PartValues } from './part-form-values';
 
 /** The drawing counts for the part with the rest of the form; until then it is only kept. */
-export function DrawingField({ name }: { name?: string | undefined }) {
+export function DrawingField({
+  name,
+  onUnderWay,
+}: {
+  name?: string | undefined;
+  onUnderWay: (isUnderWay: boolean) => void;
+}) {
   const { setValue, control, formState } = useFormContext<PartValues>();
   const drawingFileId = useWatch({ control, name: 'drawingFileId' });
   const [first] = useState(drawingFileId);
@@ -36,6 +42,7 @@ export function DrawingField({ name }: { name?: string | undefined }) {
           hint="PDF, PNG, JPEG or TIFF, at most 50 MB"
           onArrived={({ id }) => choose(id)}
           onRemoved={() => choose(null)}
+          onUnderWay={onUnderWay}
           error={formState.errors.drawingFileId?.message}
         />
       )}

@@ -1,7 +1,7 @@
 'use client';
 
 import { zodResolver } from '@hookform/resolvers/zod';
-import type { ReactNode } from 'react';
+import { useState, type ReactNode } from 'react';
 import { FormProvider, useForm } from 'react-hook-form';
 import { showOnForm } from '@/components/api/show-on-form';
 import { Button, ButtonLink } from '@/components/ui/button';
@@ -47,6 +47,7 @@ export function PartForm({
     defaultValues: values,
   });
   const { errors, isSubmitting } = form.formState;
+  const [sending, setSending] = useState(false);
   const submit = form.handleSubmit((input) =>
     save(input, { onError: showOnForm(form) }).then(
       () => undefined,
@@ -69,13 +70,19 @@ export function PartForm({
           side={
             <>
               <SizeFields />
-              <DrawingField name={drawingName} />
+              <DrawingField name={drawingName} onUnderWay={setSending} />
               <NoteField />
             </>
           }
         />
         <div className="mt-6 flex flex-wrap items-center gap-2.5 border-t-heavy border-ink pt-4">
-          <Button type="submit" look="primary" busy={isSubmitting} busyLabel={busyLabel}>
+          <Button
+            type="submit"
+            look="primary"
+            busy={isSubmitting}
+            busyLabel={busyLabel}
+            notNow={sending && 'The drawing is still on its way.'}
+          >
             {action}
           </Button>
           <ButtonLink href={cancelHref}>Leave without keeping</ButtonLink>

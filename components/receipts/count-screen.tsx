@@ -79,6 +79,7 @@ function Counting({ batchId }: { batchId: string }) {
   const router = useRouter();
   const { batch, lines } = useRead(getReceiving, { batchId }).data;
   const [photos, setPhotos] = useState<readonly string[]>([]);
+  const [sending, setSending] = useState(false);
   const form = useForm<CountFormIn, unknown, CountFormOut>({
     resolver: zodResolver(CountForm),
     defaultValues: emptyCount(lines),
@@ -90,11 +91,12 @@ function Counting({ batchId }: { batchId: string }) {
       .mutateAsync(countOf(values, { batchId, lines, photos }), { onError: showOnForm(form) })
       .catch(() => null);
     if (!done) return;
+    const counted = sums.good + sums.damaged;
     const held =
       done.nonconformances.length > 0
         ? ` ${done.nonconformances.map((one) => one.number).join(', ')} opened.`
         : '';
-    showMessage({ says: `${done.good} counted in.${held}` });
+    showMessage({ says: `${counted} counted in.${held}` });
     router.push(`/batches/${batch.id}`);
   });
   const { errors, isSubmitting } = form.formState;
@@ -115,6 +117,7 @@ function Counting({ batchId }: { batchId: string }) {
             camera
             onArrived={(file) => setPhotos((now) => [...now, file.id])}
             onRemoved={(file) => setPhotos((now) => now.filter((id) => id !== file.id))}
+            onUnderWay={setSending}
           />
           <TextArea label="Note" rows={2} maxLength={500} {...form.register('note')} />
         </div>
@@ -125,7 +128,7 @@ function Counting({ batchId }: { batchId: string }) {
             type="submit"
             busy={isSubmitting}
             busyLabel="Counting in"
-            notNow={isEmpty && 'Count what is here first.'}
+            notNow={(isEmpty && 'Count what is here first.') || (sending && 'A photo is still on its way.')}
             className="max-md:w-full"
           >
             {isEmpty ? 'Count in' : `Count in ${sums.good + sums.damaged}`}

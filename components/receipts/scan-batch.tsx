@@ -65,7 +65,7 @@ export function ScanBatch({ asked = '' }: { asked?: string }) {
           error={refused}
           onChange={() => setRefused(undefined)}
         />
-        <span className="flex gap-2 pt-6">
+        <span className="flex gap-2 sm:pt-6">
           <Button look="primary" type="submit">
             Open
           </Button>

@@ -37,7 +37,7 @@ const COLOURS = {
   stocked: 'var(--stocked-ink)',
 };
 
-/** A quantity with a limit, drawn so that the number can be read off it. */
+/** A quantity with a limit, drawn so that the number can be read off it. Narrower than asked, only its length shrinks. */
 export function SteelRule(props: SteelRuleProps) {
   const { from = 0, to, tick, number, value, limit, room, band, marks = [], says } = props;
   const { width = 190, small = false, tone = small ? 'stocked' : 'ink' } = props;
@@ -45,50 +45,49 @@ export function SteelRule(props: SteelRuleProps) {
   const top = words ? 16 : 0;
   const line = top + (small ? 9 : 20);
   const bar = small ? 6 : 9;
-  const place = (at: number) =>
-    round(1 + ((Math.min(Math.max(at, from), to) - from) / (to - from)) * (width - 2));
+  const share = (at: number) => round(((Math.min(Math.max(at, from), to) - from) / (to - from)) * 100);
+  const place = (at: number) => `${share(at)}%`;
+  const span = (start: number, end: number) => `${round(share(end) - share(start))}%`;
 
   return (
     <svg
       width={inRem(width)}
       height={inRem(line + (small ? 2 : 17))}
-      viewBox={`0 0 ${width} ${line + (small ? 2 : 17)}`}
       role="img"
       aria-label={says}
-      className="h-auto max-w-full overflow-visible"
+      className="max-w-full overflow-visible"
     >
       {band && (
         <rect
           x={place(band.from)}
           y={top + 2}
-          width={place(band.to) - place(band.from)}
+          width={span(band.from, band.to)}
           height={line - top - 2}
           fill="var(--proved-wash)"
         />
       )}
       {value !== undefined && (
-        <rect x="1" y={line - bar} width={place(value) - 1} height={bar} fill={COLOURS[tone]} />
+        <rect x="0" y={line - bar} width={place(value)} height={bar} fill={COLOURS[tone]} />
       )}
       {room && value !== undefined && limit && limit.at > value && (
         <rect
           x={place(value)}
           y={line - bar}
-          width={place(limit.at) - place(value)}
+          width={span(value, limit.at)}
           height={bar}
           fill="var(--dispatched-wash)"
           stroke="var(--dispatched-ink)"
         />
       )}
       <Ticks from={from} to={to} tick={tick} number={number} place={place} line={line} small={small} />
-      <path d={`M1 ${line}H${width - 1}`} stroke="var(--line)" />
+      <line x1="0" x2="100%" y1={line} y2={line} stroke="var(--line)" />
       {[...marks, ...(limit ? [limit] : [])].map((mark) => (
         <Mark
           key={`${mark.at} ${mark.says ?? ''}`}
           mark={mark}
-          x={place(mark.at)}
+          share={share(mark.at)}
           top={top}
           line={line}
-          width={width}
         />
       ))}
     </svg>
@@ -96,7 +95,7 @@ export function SteelRule(props: SteelRuleProps) {
 }
 
 interface TicksProps extends Required<Pick<SteelRuleProps, 'from' | 'to' | 'tick' | 'number' | 'small'>> {
-  place: (at: number) => number;
+  place: (at: number) => string;
   line: number;
 }
 
@@ -115,7 +114,7 @@ function Ticks({ from, to, tick, number, place, line, small }: TicksProps) {
         const reach = small ? -(long ? 8 : 4) : long ? 6 : 3; // eslint-disable-line no-nested-ternary -- two by two cases
         return (
           <g key={at}>
-            <path d={`M${place(at)} ${line}v${reach}`} stroke="var(--line)" />
+            <line x1={place(at)} x2={place(at)} y1={line} y2={line + reach} stroke="var(--line)" />
             {long && !small && (
               <text x={place(at)} y={line + 15} fontSize="11" textAnchor={anchor(at)} className="fill-faint">
                 {at.toLocaleString('en-US')}
@@ -130,21 +129,22 @@ function Ticks({ from, to, tick, number, place, line, small }: TicksProps) {
 
 interface MarkProps {
   mark: RuleMark;
-  x: number;
+  /** How far along the rule, in hundredths. */
+  share: number;
   top: number;
   line: number;
-  width: number;
 }
 
-function Mark({ mark: { tone = 'ink', says }, x, top, line, width }: MarkProps) {
+function Mark({ mark: { tone = 'ink', says }, share, top, line }: MarkProps) {
   const colour = tone === 'proved' ? 'var(--proved-ink)' : COLOURS[tone];
-  const left = x > width * 0.6;
+  const left = share > 60;
   return (
     <g>
-      <path d={`M${x} ${top}V${line + 3}`} stroke={colour} strokeWidth="2" />
+      <line x1={`${share}%`} x2={`${share}%`} y1={top} y2={line + 3} stroke={colour} strokeWidth="2" />
       {says && (
         <text
-          x={left ? x + 1 : x - 1}
+          x={`${share}%`}
+          dx={left ? 1 : -1}
           y="11"
           textAnchor={left ? 'end' : 'start'}
           className="font-cond"

@@ -3,12 +3,6 @@ import { amountText } from '@/lib/money';
 /** A kind of thing as it is said: `sent_mail` is a "sent mail". */
 export const kindWords = (entity: string): string => entity.replaceAll('_', ' ');
 
-/** What was done, from `thing.verb_of_it`: "dispatch", "withdraw approval". */
-export function actionWords(action: string): string {
-  const verb = action.slice(action.indexOf('.') + 1);
-  return verb.replaceAll(/[._]/g, ' ');
-}
-
 const JOBS: Record<string, string> = {
   'render-documents': 'making papers',
   'assemble-dossier': 'putting a dossier together',

@@ -1,6 +1,7 @@
 import { expect, test } from 'vitest';
 
-import { actionWords, changesBetween, pageOfThing } from '@/lib/audit/words';
+import { actionWords } from '@/lib/audit/action-words';
+import { changesBetween, pageOfThing } from '@/lib/audit/words';
 
 test('only what is different is told, in words', () => {
   expect(
@@ -34,8 +35,13 @@ test('an id of its own is no change that a reader could read', () =>
     changesBetween(null, { number: 'B-0060', processorId: '01a23042-b8c2-71fc-92a8-183aa52375a4' }),
   ).toEqual([{ field: 'number', before: null, after: 'B-0060' }]));
 
-test('an action is its verb, and a thing with a page links to it', () => {
-  expect(actionWords('processor.withdraw_approval')).toBe('withdraw approval');
+test('an action is told as what was done, and what is no verb stays as it is', () => {
+  expect(actionWords('processor.withdraw_approval')).toBe('withdrew approval');
+  expect(actionWords('batch.dispatch')).toBe('dispatched');
+  expect(actionWords('invoice.payment_failed')).toBe('payment failed');
+});
+
+test('a thing with a page links to it', () => {
   expect(pageOfThing('batch', 'b1')).toBe('/batches/b1');
   expect(pageOfThing('token', 't1')).toBeNull();
 });
