@@ -4,7 +4,7 @@ import { Numbers } from '@/components/plots/numbers';
 import type { Source } from '@/lib/trade/source';
 import type { Table } from '@/lib/trade/table';
 
-import { HOW_FOUND } from './source-line';
+import { trustWords } from './source-line';
 
 interface SourcedTableProps<Row> {
   table: Table<Row>;
@@ -26,7 +26,7 @@ export function SourcedTable<Row>({ table, heads, cells }: SourcedTableProps<Row
 function RowSource({ source }: { source: Source }) {
   return (
     <span className="block min-w-64 font-sans text-source text-quiet">
-      {source.document}; {HOW_FOUND[source.confidence]}; {source.certainty} trust
+      {source.document}; {trustWords(source)}
     </span>
   );
 }
