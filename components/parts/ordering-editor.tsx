@@ -2,11 +2,11 @@
 
 import { useMemo, useState } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
+import { useTables } from '@/components/reference/use-tables';
 import { Button } from '@/components/ui/button';
 import { TextField } from '@/components/ui/field';
 import { sourceWords } from '@/lib/batches/source-words';
 import { orderingForm } from '@/lib/parts/ordering-form';
-import { PART_TABLES } from '@/lib/reference/published-tables';
 import { ORDER_ITEM_WORDS } from '@/lib/trade/ordering/order-item';
 import type { ChecklistItem } from '@/lib/trade/ordering/ordering-checklist';
 import type { PartValues } from './part-form-values';
@@ -23,13 +23,14 @@ const HOW: Record<ChecklistItem['kind'], string> = {
 /** What the specification asks the order to state, as fields; what is missing is named even while they are folded. */
 export function OrderingEditor({ at }: { at: number }) {
   const { register, formState, control } = useFormContext<PartValues>();
+  const tables = useTables();
   const endCondition = useWatch({ control, name: 'endCondition' });
   const [open, setOpen] = useState(false);
   const step = useTypedRoute()[at];
   const form = useMemo(
     () =>
       step
-        ? orderingForm(PART_TABLES, {
+        ? orderingForm(tables, {
             specification: step.specification,
             specificationRevision: step.specificationRevision ?? '',
             classType: step.classType ?? '',
@@ -40,7 +41,7 @@ export function OrderingEditor({ at }: { at: number }) {
             endCondition,
           })
         : null,
-    [step, endCondition],
+    [tables, step, endCondition],
   );
   if (!form || form.asked.length === 0) return null;
   const missing = form.missing.map(({ item }) => ORDER_ITEM_WORDS[item]);

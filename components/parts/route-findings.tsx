@@ -2,11 +2,11 @@
 
 import { useMemo, useState } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
+import { useTables } from '@/components/reference/use-tables';
 import { Button } from '@/components/ui/button';
 import { CheckList, CheckRow } from '@/components/ui/check-row';
 import { sourceWords } from '@/lib/batches/source-words';
 import { checkTypedRoute, type RepairedStep } from '@/lib/parts/typed-route';
-import { PART_TABLES } from '@/lib/reference/published-tables';
 import { PROCESS_WORDS } from '@/lib/trade/process';
 import { EMPTY_STEP, type PartValues, type StepValues } from './part-form-values';
 import { findingWords, stepsWords } from './route-words';
@@ -17,12 +17,13 @@ const LEVELS = { blocker: 'stop', warning: 'warn', note: 'note' } as const;
 /** What the rules of the trade have against the route as it stands, and the route they propose. */
 export function RouteFindings({ onTake }: { onTake: (route: StepValues[]) => void }) {
   const { control } = useFormContext<PartValues>();
+  const tables = useTables();
   const material = useTypedMaterial();
   const route = useTypedRoute();
   const endCondition = useWatch({ control, name: 'endCondition' });
   const { findings, repaired } = useMemo(
-    () => checkTypedRoute(PART_TABLES, material, endCondition, route),
-    [material, endCondition, route],
+    () => checkTypedRoute(tables, material, endCondition, route),
+    [tables, material, endCondition, route],
   );
   const [before, setBefore] = useState<StepValues[] | null>(null);
   const wordsOf = (step: RepairedStep): string => {
