@@ -79,6 +79,13 @@ module.exports = {
       to: { path: ['^db/', '^lib/env\\.ts$'], reachable: true },
     },
     {
+      name: 'screens-read-the-tables-in-force',
+      comment: 'A shop may have its own edition of a table: screens of the shop ask useTables for it.',
+      severity: 'error',
+      from: { path: '^components/', pathNot: '^components/reference/use-tables' },
+      to: { path: '^lib/reference/(published|batch)-tables' },
+    },
+    {
       name: 'schema-imports-only-vocabulary',
       severity: 'error',
       from: { path: '^db/schema/' },

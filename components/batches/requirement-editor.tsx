@@ -29,12 +29,13 @@ interface RequirementEditorProps {
 
 /** The list of one group, typed over in place. */
 export function RequirementEditor({ batch, lineId, says, requirements, onDone }: RequirementEditorProps) {
-  const kept = requirements.map(({ characteristic, limit, unit, source, sourceText }) => ({
+  const kept = requirements.map(({ characteristic, limit, unit, source, sourceText, readFrom }) => ({
     characteristic,
     limit,
     unit,
     source,
     sourceText,
+    readFrom,
   }));
   const form = useForm<Values, unknown, z.output<typeof Values>>({
     resolver: zodResolver(Values),

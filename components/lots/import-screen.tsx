@@ -3,6 +3,7 @@
 import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 import { useWrite } from '@/components/api/use-api';
+import { saveText } from '@/components/files/save-text';
 import { Button, ButtonLink } from '@/components/ui/button';
 import { Failing } from '@/components/ui/failing';
 import { FileDrop } from '@/components/ui/file-drop';
@@ -59,7 +60,9 @@ export function ImportScreen() {
           hint="comma, semicolon or tab between the cells; at most 1,000 rows"
         />
         <div className="pt-6 max-md:pt-0">
-          <Button onClick={saveTemplate}>Save an empty file to fill in</Button>
+          <Button onClick={() => saveText('lots.csv', importTemplate())}>
+            Save an empty file to fill in
+          </Button>
         </div>
       </div>
       {check.isPending && <Loading label="Looking through the file" />}
@@ -170,12 +173,3 @@ function PreviewOfImport({
 
 const count = (many: number, thing: string): string =>
   `${many.toLocaleString('en-US')} ${thing}${many === 1 ? '' : 's'}`;
-
-function saveTemplate(): void {
-  const url = URL.createObjectURL(new Blob([importTemplate()], { type: 'text/csv' }));
-  const link = document.createElement('a');
-  link.href = url;
-  link.download = 'lots.csv';
-  link.click();
-  setTimeout(() => URL.revokeObjectURL(url), 10_000);
-}

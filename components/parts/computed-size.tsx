@@ -2,9 +2,9 @@
 
 import { useFormContext, useWatch } from 'react-hook-form';
 import { areaWords, massWords } from '@/components/batches/measures';
+import { useTables } from '@/components/reference/use-tables';
 import { useMe } from '@/components/session/use-me';
 import { computedMass, typedSizes } from '@/lib/parts/computed-mass';
-import { PART_TABLES } from '@/lib/reference/published-tables';
 import { sourceWords } from '@/lib/batches/source-words';
 import type { PartValues } from './part-form-values';
 import { useTypedMaterial } from './use-typed-part';
@@ -12,18 +12,14 @@ import { useTypedMaterial } from './use-typed-part';
 /** Mass and area from the sizes, where nobody typed them: shown as computed, never kept. */
 export function ComputedSize() {
   const { control } = useFormContext<PartValues>();
+  const tables = useTables();
   const material = useTypedMaterial();
   const units = useMe()?.units ?? 'inch';
   const [length = '', width = '', height = '', thickness = '', mass, area, condition] = useWatch({
     control,
     name: ['length', 'width', 'height', 'thickness', 'mass', 'area', 'endCondition'],
   });
-  const found = computedMass(
-    PART_TABLES,
-    material,
-    typedSizes({ length, width, height, thickness }),
-    condition,
-  );
+  const found = computedMass(tables, material, typedSizes({ length, width, height, thickness }), condition);
   if (!found || (mass && area)) return null;
   return (
     <p className="pb-2 text-second" aria-live="polite">

@@ -1,9 +1,9 @@
 'use client';
 
 import { SourceLine } from '@/components/reference/source-line';
+import { useTables } from '@/components/reference/use-tables';
 import { Edge } from '@/components/ui/edge';
 import { conditionsAfter, explainTyped, knownConditions } from '@/lib/parts/condition-choices';
-import { PART_TABLES } from '@/lib/reference/published-tables';
 import { conditionWords } from './condition-words';
 import { useTypedMaterial } from './use-typed-part';
 
@@ -15,8 +15,9 @@ interface ConditionAdviceProps {
 
 /** What can be made of the condition before, said while it is typed; it refuses nothing. */
 export function ConditionAdvice({ from, to, maker }: ConditionAdviceProps) {
+  const tables = useTables();
   const material = useTypedMaterial();
-  const explained = explainTyped(PART_TABLES, material, { from, to });
+  const explained = explainTyped(tables, material, { from, to });
   const words = explained && conditionWords(explained, maker);
   return (
     <div aria-live="polite">
@@ -32,11 +33,10 @@ export function ConditionAdvice({ from, to, maker }: ConditionAdviceProps) {
 
 /** What is offered in a condition's field; anything else can be typed. */
 export function ConditionList({ id, after }: { id: string; after?: string }) {
+  const tables = useTables();
   const material = useTypedMaterial();
   const offered =
-    after === undefined
-      ? knownConditions(PART_TABLES, material)
-      : conditionsAfter(PART_TABLES, material, after);
+    after === undefined ? knownConditions(tables, material) : conditionsAfter(tables, material, after);
   return (
     <datalist id={id}>
       {offered.map((condition) => (

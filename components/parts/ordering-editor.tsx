@@ -2,12 +2,12 @@
 
 import { useMemo, useState } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
+import { useTables } from '@/components/reference/use-tables';
 import { Button } from '@/components/ui/button';
 import { TextField } from '@/components/ui/field';
 import { sourceWords } from '@/lib/batches/source-words';
 import { orderingForm } from '@/lib/parts/ordering-form';
 import { ORDERING_KIND_WORDS } from '@/lib/reference/ordering-words';
-import { PART_TABLES } from '@/lib/reference/published-tables';
 import { ORDER_ITEM_WORDS } from '@/lib/trade/ordering/order-item';
 import type { PartValues } from './part-form-values';
 import { useTypedRoute } from './use-typed-part';
@@ -15,13 +15,14 @@ import { useTypedRoute } from './use-typed-part';
 /** What the specification asks the order to state, as fields; what is missing is named even while they are folded. */
 export function OrderingEditor({ at }: { at: number }) {
   const { register, formState, control } = useFormContext<PartValues>();
+  const tables = useTables();
   const endCondition = useWatch({ control, name: 'endCondition' });
   const [open, setOpen] = useState(false);
   const step = useTypedRoute()[at];
   const form = useMemo(
     () =>
       step
-        ? orderingForm(PART_TABLES, {
+        ? orderingForm(tables, {
             specification: step.specification,
             specificationRevision: step.specificationRevision ?? '',
             classType: step.classType ?? '',
@@ -32,7 +33,7 @@ export function OrderingEditor({ at }: { at: number }) {
             endCondition,
           })
         : null,
-    [step, endCondition],
+    [tables, step, endCondition],
   );
   if (!form || form.asked.length === 0) return null;
   const missing = form.missing.map(({ item }) => ORDER_ITEM_WORDS[item]);

@@ -2,8 +2,8 @@
 
 import { useMemo } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
+import { useTables } from '@/components/reference/use-tables';
 import { checkTypedRoute } from '@/lib/parts/typed-route';
-import { PART_TABLES } from '@/lib/reference/published-tables';
 import { CheckedRouteView } from './checked-route';
 import { EMPTY_STEP, type PartValues, type StepValues } from './part-form-values';
 import { useTypedMaterial, useTypedRoute } from './use-typed-part';
@@ -11,12 +11,13 @@ import { useTypedMaterial, useTypedRoute } from './use-typed-part';
 /** What the rules of the trade have against the route as it stands, and the route they propose. */
 export function RouteFindings({ onTake }: { onTake: (route: StepValues[]) => void }) {
   const { control } = useFormContext<PartValues>();
+  const tables = useTables();
   const material = useTypedMaterial();
   const route = useTypedRoute();
   const endCondition = useWatch({ control, name: 'endCondition' });
   const checked = useMemo(
-    () => checkTypedRoute(PART_TABLES, material, endCondition, route),
-    [material, endCondition, route],
+    () => checkTypedRoute(tables, material, endCondition, route),
+    [tables, material, endCondition, route],
   );
   return (
     <CheckedRouteView

@@ -1,11 +1,12 @@
 import Link from 'next/link';
+import { useTables } from '@/components/reference/use-tables';
 import { Empty } from '@/components/ui/empty';
 import { Section } from '@/components/ui/section';
 import { Cell, Row, Table } from '@/components/ui/table';
 import type { Part, RouteStep } from '@/lib/parts/contract';
 import { orderingForm } from '@/lib/parts/ordering-form';
 import { statedItems } from '@/lib/parts/ordering-answers';
-import { PART_TABLES } from '@/lib/reference/published-tables';
+import type { PartTables } from '@/lib/reference/published-tables';
 import { ORDER_ITEM_WORDS } from '@/lib/trade/ordering/order-item';
 import { PROCESS_WORDS } from '@/lib/trade/process';
 
@@ -13,6 +14,7 @@ const PROOF_COLUMNS = [{ says: 'To be proved' }, { says: 'Limit' }, { says: 'Fro
 
 /** The outside steps in order, each with what its papers must show. */
 export function RouteOfPart({ part }: { part: Part }) {
+  const tables = useTables();
   return (
     <Section
       title="Outside steps"
@@ -27,14 +29,21 @@ export function RouteOfPart({ part }: { part: Part }) {
       )}
       <ol>
         {part.route.map((step) => (
-          <Step key={step.id} step={step} endCondition={part.endCondition} />
+          <Step key={step.id} step={step} endCondition={part.endCondition} tables={tables} />
         ))}
       </ol>
     </Section>
   );
 }
 
-function Step({ step, endCondition }: { step: RouteStep; endCondition: string }) {
+interface StepProps {
+  step: RouteStep;
+  endCondition: string;
+  /** Those in force in the shop. */
+  tables: PartTables;
+}
+
+function Step({ step, endCondition, tables }: StepProps) {
   return (
     <li className="grid grid-cols-[1.75rem_minmax(0,1fr)] border-b border-rule py-2.5">
       <span className="num text-quiet">{step.seq}</span>
@@ -62,7 +71,7 @@ function Step({ step, endCondition }: { step: RouteStep; endCondition: string })
             </span>
           )}
         </div>
-        <OrderOfStep step={step} endCondition={endCondition} />
+        <OrderOfStep step={step} endCondition={endCondition} tables={tables} />
         {step.note && <p className="[overflow-wrap:anywhere] text-quiet">{step.note}</p>}
         {step.toProve.length > 0 && (
           <Table label={`To be proved at step ${step.seq}`} columns={PROOF_COLUMNS} dense className="mt-1">
@@ -88,9 +97,9 @@ function Step({ step, endCondition }: { step: RouteStep; endCondition: string })
 }
 
 /** What the order states for the step beside its fields, and what its specification still wants stated. */
-export function OrderOfStep({ step, endCondition }: { step: RouteStep; endCondition: string }) {
+export function OrderOfStep({ step, endCondition, tables }: StepProps) {
   const stated = statedItems(step.ordering);
-  const form = orderingForm(PART_TABLES, {
+  const form = orderingForm(tables, {
     specification: step.specification,
     specificationRevision: step.specificationRevision ?? '',
     classType: step.classType ?? '',

@@ -3,25 +3,26 @@
 import { useMemo } from 'react';
 import { useFormContext } from 'react-hook-form';
 import { SourceLine } from '@/components/reference/source-line';
+import { useTables } from '@/components/reference/use-tables';
 import { useClock } from '@/components/session/use-me';
 import { Button } from '@/components/ui/button';
 import { Edge } from '@/components/ui/edge';
 import { calledSpecification } from '@/lib/parts/called-specification';
 import { CALL_OUT_WORDS } from '@/lib/reference/call-out-words';
-import { PART_TABLES } from '@/lib/reference/published-tables';
 import type { PartValues } from './part-form-values';
 import { useTypedRoute } from './use-typed-part';
 
 /** What became of the specification that a step names, and what the call-out silently means. */
 export function SpecificationAdvice({ at }: { at: number }) {
   const { setValue } = useFormContext<PartValues>();
+  const tables = useTables();
   const { now } = useClock();
   const step = useTypedRoute()[at];
   const on = now.toISOString().slice(0, 10);
   const { specification = '', specificationRevision: revision = '', classType = '' } = step ?? {};
   const called = useMemo(
-    () => calledSpecification(PART_TABLES, { specification, revision, classType }, on),
-    [specification, revision, classType, on],
+    () => calledSpecification(tables, { specification, revision, classType }, on),
+    [tables, specification, revision, classType, on],
   );
   return (
     <div aria-live="polite">

@@ -2,17 +2,18 @@
 
 import { useMemo } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
+import { useTables } from '@/components/reference/use-tables';
 import { materialOf, type MaterialOf } from '@/lib/parts/material-of';
-import { PART_TABLES } from '@/lib/reference/published-tables';
 import type { PartValues, StepValues } from './part-form-values';
 
 /** The material as it is typed now. */
 export function useTypedMaterial(): MaterialOf {
   const { control } = useFormContext<PartValues>();
+  const tables = useTables();
   const [alloy, form, clad] = useWatch({ control, name: ['alloy', 'form', 'clad'] });
   return useMemo(
-    () => materialOf(PART_TABLES.material, { alloy, form, clad: clad ?? false }),
-    [alloy, form, clad],
+    () => materialOf(tables.material, { alloy, form, clad: clad ?? false }),
+    [tables, alloy, form, clad],
   );
 }
 

@@ -12,6 +12,7 @@ const PAGES: readonly { says: string; href: string; permission: Permission }[] =
   { says: 'Shop and policies', href: '/settings/shop', permission: 'shop.settings' },
   { says: 'How the shop pays', href: '/settings/payments', permission: 'shop.settings' },
   { says: 'People', href: '/settings/people', permission: 'people.manage' },
+  { says: 'Tables of the trade', href: '/settings/tables', permission: 'reference.read' },
   { says: 'Audit trail', href: '/audit', permission: 'audit.read' },
   { says: 'Work that failed', href: '/jobs', permission: 'jobs.manage' },
   { says: 'The API', href: '/api-docs', permission: 'shop.read' },

@@ -17,7 +17,8 @@ import {
 
 import type { FrozenLine } from '@/lib/batches/frozen-line';
 import { STAGES } from '@/lib/batches/stage';
-import { REQUIREMENT_SOURCES } from '@/lib/parts/to-prove';
+import { REQUIREMENT_SOURCES, type ToProve } from '@/lib/parts/to-prove';
+import type { TableReference } from '@/lib/trade/table';
 
 import {
   appDoor,
@@ -158,6 +159,8 @@ export const requirements = pgTable(
     unit: text('unit').notNull().default(''),
     source: requirementSource('source').notNull().default('specification'),
     sourceText: text('source_text').notNull().default(''),
+    /** The table and edition that proposed it, with the limit it gave. */
+    readFrom: jsonb('read_from').$type<NonNullable<ToProve['readFrom']>>(),
   },
   (t) => [
     unique('requirements_shop').on(t.shopId, t.id),
@@ -180,6 +183,8 @@ export const overrides = pgTable(
     subject: text('subject').notNull().default(''),
     reason: text('reason').notNull(),
     by: uuid('by').notNull(),
+    /** The tables and editions by which the finding was made, where it was made by any. */
+    readFrom: jsonb('read_from').$type<TableReference[]>(),
     createdAt: createdColumn(),
   },
   (t) => [

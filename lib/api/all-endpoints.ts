@@ -20,6 +20,7 @@ import * as batchLinks from '@/lib/portal/link-endpoints';
 import * as processors from '@/lib/processors/endpoints';
 import * as readings from '@/lib/readings/endpoints';
 import * as receipts from '@/lib/receipts/endpoints';
+import * as reference from '@/lib/reference/endpoints';
 import * as requirements from '@/lib/requirements/endpoints';
 import * as search from '@/lib/search/endpoints';
 import * as session from '@/lib/session/endpoints';
@@ -52,6 +53,7 @@ export const ALL_ENDPOINTS: readonly Endpoint[] = [
   processors,
   readings,
   receipts,
+  reference,
   requirements,
   search,
   session,

@@ -16,6 +16,9 @@ export const PERMISSIONS = {
   'jobs.manage': ['admin'],
   'search.use': EVERYONE_IN_SHOP,
 
+  'reference.read': EVERYONE_IN_SHOP,
+  'reference.edit': ['lead', 'admin'],
+
   'part.read': EVERYONE_IN_SHOP,
   'part.edit': ['lead', 'admin'],
   'lot.read': EVERYONE_IN_SHOP,

@@ -3,6 +3,8 @@ import { z } from 'zod';
 import { declare } from '@/lib/api/endpoint';
 import { Id, Moment } from '@/lib/api/shapes';
 
+import { TableReferenceShape } from '@/lib/reference/table-reference';
+
 import { CHECK_LEVELS, WAYS_OUT } from './finding';
 import { BatchRef, Seen } from './contract';
 
@@ -13,6 +15,8 @@ const Finding = z.object({
   sentence: z.string(),
   rest: z.string(),
   source: z.string().optional(),
+  /** The tables and editions it was found by. */
+  readFrom: z.array(TableReferenceShape).optional(),
   waysOut: z.array(
     z.object({ way: z.enum(WAYS_OUT), says: z.string(), lineId: Id.optional(), partId: Id.optional() }),
   ),

@@ -7,7 +7,7 @@ import type { Grounds } from '@/lib/trade/verdict';
 import type { Check, CheckedLine } from './check';
 import { OVERRIDE, type Finding } from './finding';
 import { metalOf } from './metal-of';
-import { sourceWords } from './source-words';
+import { citing } from './source-words';
 
 /** Every solution treatment drives the core's copper further through the cladding. */
 export const hasReheatsLeft: Check = {
@@ -60,7 +60,7 @@ function findingOf(line: CheckedLine, standing: Standing): Finding[] {
       },
     ];
   if (standing.next === 'allowed') return [];
-  const source = sourceWords(standing.source);
+  const cited = citing(standing.source);
   const counted = countedWords(standing);
   if (standing.next === 'allowed_for_the_last_time')
     return [
@@ -70,7 +70,7 @@ function findingOf(line: CheckedLine, standing: Standing): Finding[] {
         subject: line.id,
         sentence: `${of} is on its last solution treatment.`,
         rest: `Clad, ${counted}. If this one fails, it cannot be done again.`,
-        source,
+        ...cited,
         waysOut: [takeOut],
       },
     ];
@@ -84,7 +84,7 @@ function findingOf(line: CheckedLine, standing: Standing): Finding[] {
         ? `${of} needs engineering approval to be solution treated again.`
         : `${of} may not be solution treated again.`,
       rest: `Clad, ${counted}. Once more and too much copper is through the cladding.`,
-      source,
+      ...cited,
       waysOut: [takeOut, OVERRIDE],
     },
   ];

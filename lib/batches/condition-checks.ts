@@ -10,7 +10,7 @@ import { OVERRIDE, type Finding } from './finding';
 import { metalOf } from './metal-of';
 import { materialWords } from './material-words';
 import { oncePerStep } from './once-per-step';
-import { sourceWords } from './source-words';
+import { citing } from './source-words';
 
 const CHANGES_CONDITION: readonly Process[] = [
   'solution_heat_treat_and_age',
@@ -79,7 +79,7 @@ function findingOf(line: CheckedLine, answer: Answer): Finding[] {
       },
     ];
   const { from, to } = answer;
-  const source = sourceWords(answer.source);
+  const cited = citing(answer.source);
   if (answer.reach === 'cannot_be_made')
     return [
       {
@@ -88,7 +88,7 @@ function findingOf(line: CheckedLine, answer: Answer): Finding[] {
         subject,
         sentence: `Line ${line.lineNo} asks for ${to}, which no heat treater makes of ${from}.`,
         rest: `${WHY_NOT[answer.why]}${answer.gives ? ` Trying gives ${materialWords(wordsOf(line))} in ${answer.gives.condition}, whose allowables differ.` : ''}`,
-        source,
+        ...cited,
         waysOut: [takeOut(line), OVERRIDE],
       },
     ];
@@ -100,7 +100,7 @@ function findingOf(line: CheckedLine, answer: Answer): Finding[] {
         subject,
         sentence: `Line ${line.lineNo} asks for ${to}; made of ${from} it is called ${answer.properName}.`,
         rest: `${to} is the mill's name. The allowables of ${answer.properName} differ: see that the drawing allows it.`,
-        source,
+        ...cited,
         waysOut: [takeOut(line)],
       },
     ];

@@ -10,7 +10,7 @@ import { OVERRIDE, type Finding, type WayOut } from './finding';
 import { loadsAsSet, type NumberedLoad } from './loads-as-set';
 import { massOf } from './load-plan';
 import { oncePerStep } from './once-per-step';
-import { sourceWords } from './source-words';
+import { citing } from './source-words';
 
 /**
  * Whether parts go into what the processor has: each into a furnace or tank of the kinds that its process needs,
@@ -179,7 +179,7 @@ function heavyLoad(
       subject: `load ${load.number}`,
       sentence: `${isOnly ? 'The load' : `Load ${load.number}`} is heavier than any hearth carries.`,
       rest: `${mass.isComputed ? 'About ' : ''}${stands.totalKg.toFixed(1)} kg; ${strongest.name} carries ${strongest.limitWords ?? ''}. Split it, or ask how it is run.`,
-      source: sourceWords(stands.source),
+      ...citing(stands.source),
       waysOut: [{ way: 'set_loads', says: 'Set the loads' }, SEE_EQUIPMENT],
     },
   ];

@@ -1,3 +1,5 @@
+import type { TableReference } from '@/lib/trade/table';
+
 /** Whether it keeps the batch here, asks for a second look, or is only good to know. */
 export const CHECK_LEVELS = ['stop', 'warn', 'note'] as const;
 export type CheckLevel = (typeof CHECK_LEVELS)[number];
@@ -31,6 +33,8 @@ export interface Finding {
   sentence: string;
   rest: string;
   source?: string;
+  /** The tables and editions it was found by, where it was found by any. */
+  readFrom?: TableReference[];
   waysOut: readonly WayOut[];
 }
 

@@ -4,7 +4,7 @@ import { classNeeded } from '@/lib/trade/pyrometry/class-needed';
 import type { Check, CheckedEquipment, CheckedLine, CheckFacts } from './check';
 import type { Finding, WayOut } from './finding';
 import { loadsAsSet, type NumberedLoad } from './loads-as-set';
-import { sourceWords } from './source-words';
+import { citing } from './source-words';
 
 const SEE_EQUIPMENT: WayOut = { way: 'see_processor', says: 'See its equipment' };
 
@@ -40,7 +40,7 @@ function tooCold(
       subject: `load ${number} ${governing.id}`,
       sentence: `No furnace of ${processor.name} is entered for the temperature of load ${number}.`,
       rest: `It asks for ${Math.round(lowestC)} °C or more; entered are ${known}.`,
-      ...(source && { source: sourceWords(source) }),
+      ...(source && citing(source)),
       waysOut: [SEE_EQUIPMENT],
     },
   ];
@@ -57,7 +57,7 @@ function tooLoose({ requirements }: BatchTables, furnaces: readonly CheckedEquip
       subject: '',
       sentence: `Solution treatment of aluminium takes a furnace of class ${needed.loosest}.`,
       rest: `Entered are ${known}.`,
-      source: sourceWords(needed.source),
+      ...citing(needed.source),
       waysOut: [SEE_EQUIPMENT],
     },
   ];

@@ -37,10 +37,12 @@ export async function getBatchLines(ctx: Ctx, { batchId }: { batchId: string }) 
       unit: requirements.unit,
       source: requirements.source,
       sourceText: requirements.sourceText,
+      readFrom: requirements.readFrom,
     })
     .from(requirements)
     .where(eq(requirements.batchId, batchId))
     .orderBy(asc(requirements.seq), asc(requirements.id));
+  const tables = await tablesOf(ctx);
   return {
     requirements: asked,
     lines: lines.map(({ line, now, part }) => ({
@@ -56,7 +58,7 @@ export async function getBatchLines(ctx: Ctx, { batchId }: { batchId: string }) 
       loadNo: line.loadNo,
       massG: part.massG,
       areaMm2: part.areaMm2,
-      computed: computedSize(computedMassOf(tablesOf(ctx), part)),
+      computed: computedSize(computedMassOf(tables, part)),
     })),
   };
 }

@@ -111,11 +111,12 @@ export async function listWaitingLots(
     .orderBy(asc(lots.id))
     .limit(limit + 1);
   const page = toPage(rows, limit, (row) => row.lotId);
+  const tables = await tablesOf(ctx);
   return {
     ...page,
     rows: page.rows.map((row) => ({
       ...row,
-      computed: computedSize(computedMassOf(tablesOf(ctx), row)),
+      computed: computedSize(computedMassOf(tables, row)),
       material: materialWords(row),
       partSuperseded: row.supersededAt !== null,
     })),

@@ -1,9 +1,12 @@
+import { QUENCH_DELAYS } from '@/lib/trade/tables/quench-delays';
+import { SOAK_TIMES } from '@/lib/trade/tables/soak-times';
+
 import type { Check, CheckedLine, CheckFacts } from './check';
 import { APART_WORDS } from './apart-words';
 import type { Finding } from './finding';
 import { groupedBy } from './grouped-by';
 import { loadsOfBatch, type LoadsOfBatch } from './loads-of-batch';
-import { sourceWords } from './source-words';
+import { citing, sourceWords } from './source-words';
 
 type Loads = LoadsOfBatch<CheckedLine>;
 
@@ -76,10 +79,15 @@ function lineWords(lines: readonly CheckedLine[]): string {
   return `${lines.length === 1 ? 'line' : 'lines'} ${numbers.join(', ')}${more}`;
 }
 
-function sourceOf({ apart }: Loads): Pick<Finding, 'source'> {
-  const [source] = apart[0]?.sources ?? [];
-  return source ? { source: sourceWords(source) } : {};
+function sourceOf({ apart }: Loads): Pick<Finding, 'source' | 'readFrom'> {
+  const { sources = [] } = apart[0] ?? {};
+  const [source] = sources;
+  // Said is the first; recorded is all that decided it.
+  return source ? { ...citing(...sources), source: sourceWords(source) } : {};
 }
+
+/** Tables that the note is read from. */
+const SOAK_AND_QUENCH: readonly string[] = [SOAK_TIMES.id, QUENCH_DELAYS.id];
 
 /** In the words in which the part says its thickness. */
 function soaksAndQuenches({ loads }: Loads): Finding[] {
@@ -87,7 +95,7 @@ function soaksAndQuenches({ loads }: Loads): Finding[] {
     if (!load.solution) return [];
     const { soakMin, longestMin } = load.solution;
     const thickness = load.governing.part.thickness ?? `${load.governingMm} mm`;
-    const [source] = load.sources;
+    const said = load.sources.filter(({ readFrom }) => SOAK_AND_QUENCH.includes(readFrom?.table ?? ''));
     const rest = [
       longestMin === null ? '' : `At most ${longestMin} min, for the clad.`,
       load.maxDelayS === null ? '' : `Into the quench within ${load.maxDelayS} s.`,
@@ -99,7 +107,7 @@ function soaksAndQuenches({ loads }: Loads): Finding[] {
         subject: load.governing.id,
         sentence: `${loads.length > 1 ? `Load ${at + 1} of the plan soaks` : 'It soaks'} ${soakMin} min: ${thickness} governs.`,
         rest: rest.filter(Boolean).join(' '),
-        ...(source && { source: sourceWords(source) }),
+        ...citing(...(said.length > 0 ? said : load.sources.slice(0, 1))),
         waysOut: [],
       },
     ];

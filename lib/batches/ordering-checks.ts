@@ -7,7 +7,7 @@ import type { ChecklistItem, OrderingKind } from '@/lib/trade/ordering/ordering-
 import type { Check, CheckedLine, CheckFacts } from './check';
 import type { Finding } from './finding';
 import { oncePerStep } from './once-per-step';
-import { sourceWords } from './source-words';
+import { citing } from './source-words';
 
 /** The processor may not begin without them; the rest it does by the specification's own defaults. */
 const FIRM: readonly OrderingKind[] = ['must_state', 'must_be_agreed'];
@@ -66,6 +66,7 @@ function findingOf(
   const [first] = missing;
   if (!line || !first) return [];
   const which = linesWords(lines.map(({ lineNo }) => lineNo));
+  const cited = citing(first.source);
   const paragraph = first.paragraph === null ? '' : `, ${first.paragraph}`;
   return [
     {
@@ -74,7 +75,8 @@ function findingOf(
       subject: line.id,
       sentence: `The order for ${which} leaves out ${missing.length === 1 ? 'one thing' : `${missing.length} things`} that ${specification} wants stated.`,
       rest: `${sentence(missing.map(({ item }) => ORDER_ITEM_WORDS[item]).join('; '))}. The processor has to ask, or decide for you.`,
-      source: `${sourceWords(first.source)}${paragraph}`,
+      ...cited,
+      source: `${cited.source}${paragraph}`,
       waysOut: [{ way: 'state_order', says: `State it for ${line.partNumber}`, partId: line.part.id }],
     },
   ];

@@ -30,7 +30,10 @@ export async function overrideCheck(
 
   const [added] = await ctx.tx
     .insert(overrides)
-    .values({ id: newId(), shopId: shopOf(ctx), batchId, check, subject, reason, by, createdAt: ctx.now })
+    .values({
+      ...{ id: newId(), shopId: shopOf(ctx), batchId, check, subject, reason, by, createdAt: ctx.now },
+      readFrom: finding.readFrom ?? null,
+    })
     .onConflictDoNothing()
     .returning({ id: overrides.id });
   if (!added) throw new AppError('conflict', 'This was let pass already.');
@@ -38,7 +41,7 @@ export async function overrideCheck(
     action: 'batch.override',
     entity: 'batch',
     entityId: batchId,
-    after: { check, subject, what: finding.sentence, reason },
+    after: { check, subject, what: finding.sentence, reason, readFrom: finding.readFrom ?? [] },
   });
   await refreshStanding(ctx, batchId);
   return refOf(batch);

@@ -55,7 +55,7 @@ export async function readCheckFacts(ctx: Ctx, batchId: string): Promise<CheckFa
       equipment: (await readEquipment(ctx, batch.processorId)).map(checkedEquipment),
     },
     lines: await readLines(ctx, batchId),
-    tables: tablesOf(ctx),
+    tables: await tablesOf(ctx),
   };
 }
 
@@ -208,6 +208,7 @@ export const readOverrides = (ctx: Ctx, batchId: string) =>
       subject: overrides.subject,
       reason: overrides.reason,
       by: overrides.by,
+      readFrom: overrides.readFrom,
       createdAt: overrides.createdAt,
     })
     .from(overrides)

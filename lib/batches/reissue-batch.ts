@@ -184,6 +184,7 @@ async function write(ctx: Ctx, batchId: string, before: StatedTerms, after: Stat
   for (const [at, { id, limit, unit }] of after.requirements.entries()) {
     const old = before.requirements[at];
     if (limit !== old?.limit || unit !== old.unit)
-      await ctx.tx.update(requirements).set({ limit, unit }).where(eq(requirements.id, id));
+      // Typed over, it was not read from a table any more.
+      await ctx.tx.update(requirements).set({ limit, unit, readFrom: null }).where(eq(requirements.id, id));
   }
 }

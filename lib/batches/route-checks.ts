@@ -8,7 +8,7 @@ import { OVERRIDE, type Finding } from './finding';
 import { metalOf } from './metal-of';
 import { oncePerStep } from './once-per-step';
 import { ROUTE_RULE_WORDS } from './route-rule-words';
-import { sourceWords } from './source-words';
+import { citing } from './source-words';
 
 /** What the rules of the trade have against this step where it stands in the route of its part. */
 export const standsInOrder: Check = {
@@ -67,7 +67,7 @@ const stopOf = (line: CheckedLine, finding: RouteFinding): Finding => ({
   subject: line.id,
   sentence: `Line ${line.lineNo}: the route of ${line.partNumber} is not in order.`,
   rest: `${sentence(wordsOf(finding))} Change the route, or take the line out.`,
-  source: sourceWords(finding.source),
+  ...citing(finding.source),
   waysOut: [{ way: 'take_out_line', says: `Take line ${line.lineNo} out`, lineId: line.id }, OVERRIDE],
 });
 
@@ -79,7 +79,7 @@ function warningOf({ finding, lines }: { finding: RouteFinding; lines: readonly 
     subject: '',
     sentence: `${lines.length === 1 ? `Line ${numbers}` : `Lines ${numbers}`}: look at the route.`,
     rest: sentence(wordsOf(finding)),
-    source: sourceWords(finding.source),
+    ...citing(finding.source),
     waysOut: [],
   };
 }

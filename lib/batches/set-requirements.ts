@@ -7,7 +7,7 @@ import { authorize } from '@/lib/auth/authorize';
 import { shopOf, type Ctx } from '@/lib/auth/context';
 import { notFound } from '@/lib/errors';
 import { newId } from '@/lib/ids';
-import type { ToProve } from '@/lib/parts/to-prove';
+import { asRead, type ToProve } from '@/lib/parts/to-prove';
 
 import { changeBuilding, refOf } from './change-building';
 import type { setRequirements as declaration } from './contract';
@@ -42,7 +42,14 @@ export async function setRequirements(
     await ctx.tx
       .insert(requirements)
       .values(
-        asked.map((one, at) => ({ id: newId(), shopId: shopOf(ctx), batchId, lineId, seq: at + 1, ...one })),
+        asked.map((one, at) => ({
+          id: newId(),
+          shopId: shopOf(ctx),
+          batchId,
+          lineId,
+          seq: at + 1,
+          ...asRead(one),
+        })),
       );
   }
   await recordAudit(ctx, {

@@ -9,7 +9,7 @@ import { successorsOf } from '@/lib/trade/lineage/successors-of';
 
 import type { Check, CheckFacts } from './check';
 import type { Finding } from './finding';
-import { sourceWords } from './source-words';
+import { citing } from './source-words';
 
 /** The specification as the library writes it; null where it does not recognise one. */
 function calledOn({ batch }: CheckFacts): { number: string; revision: string | null } | null {
@@ -47,7 +47,7 @@ export const isInForce: Check = {
         rest: names
           ? `In its place stands ${names}. The drawing or contract decides which one is ordered.`
           : 'What stands in its place is not recorded here. The drawing or contract decides what is ordered.',
-        source: sourceWords(standing.source),
+        ...citing(standing.source),
         waysOut: [],
       },
     ];
@@ -71,7 +71,7 @@ export const meansWhatItSays: Check = {
         subject: '',
         sentence: `About ${called.number}:`,
         rest: CALL_OUT_WORDS[note],
-        source: sourceWords(source),
+        ...citing(source),
         waysOut: [],
       }),
     );

@@ -90,7 +90,7 @@ export async function getPart(ctx: Ctx, { partId }: { partId: string }) {
     height: measured(part.heightMm, part.heightEntered),
     mass: measured(part.massG, part.massEntered),
     area: measured(part.areaMm2, part.areaEntered),
-    computed: computedOf(ctx, part),
+    computed: await computedOf(ctx, part),
     drawing,
     route: await routeOf(ctx, partId),
     revisions: await revisionsOf(ctx, part.number),
@@ -99,8 +99,8 @@ export async function getPart(ctx: Ctx, { partId }: { partId: string }) {
   };
 }
 
-function computedOf(ctx: Ctx, part: KeptPart) {
-  const found = computedMassOf(tablesOf(ctx), part);
+async function computedOf(ctx: Ctx, part: KeptPart) {
+  const found = computedMassOf(await tablesOf(ctx), part);
   if (!found) return null;
   const { massG, areaMm2, rule, density } = found;
   return {

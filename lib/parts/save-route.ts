@@ -8,6 +8,7 @@ import { newId } from '@/lib/ids';
 import type { StepInput } from './contract';
 import { answersKept } from './ordering-answers';
 import { orNull } from './part-columns';
+import { asRead } from './to-prove';
 import { PROCESS_WORDS } from '@/lib/trade/process';
 
 /**
@@ -84,7 +85,7 @@ const stepColumns = (step: StepInput, seq: number) => ({
   classType: orNull(step.classType),
   conditionBefore: orNull(step.conditionBefore),
   targetCondition: orNull(step.targetCondition),
-  toProve: step.toProve,
+  toProve: step.toProve.map(asRead),
   ordering: answersKept(step.ordering),
   note: orNull(step.note),
 });

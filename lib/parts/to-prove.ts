@@ -1,5 +1,9 @@
 import { z } from 'zod';
 
+import { TableReferenceShape } from '@/lib/reference/table-reference';
+
+import { limitWords } from './limit-words';
+
 /** Where a requirement comes from. */
 export const REQUIREMENT_SOURCES = ['drawing', 'specification', 'shop'] as const;
 
@@ -11,5 +15,13 @@ export const ToProve = z.object({
   unit: z.string().trim().max(24).default(''),
   source: z.enum(REQUIREMENT_SOURCES).default('specification'),
   sourceText: z.string().trim().max(200).default(''),
+  /** The table and edition that proposed it, with the limit it gave; none where a person wrote it. */
+  readFrom: TableReferenceShape.extend({ gave: z.string().max(250) }).nullish(),
 });
 export type ToProve = z.infer<typeof ToProve>;
+
+/** As it is kept: a limit that was typed over was not read from the table any more. */
+export const asRead = (one: ToProve): ToProve => ({
+  ...one,
+  readFrom: one.readFrom?.gave === limitWords(one) ? one.readFrom : null,
+});

@@ -26,6 +26,7 @@ import { SOLUTION_TEMPERATURES } from '@/lib/trade/tables/solution-temperatures'
 import { STEEL_TEMPERING, type SteelTemperingRow } from '@/lib/trade/tables/steel-tempering';
 import { STEEL_WINDOWS, type SteelWindowRow } from '@/lib/trade/tables/steel-windows';
 
+import { inForce } from './in-force';
 import { PART_TABLES, type PartTables } from './published-tables';
 
 /** How often clad metal may be treated, by whose document is ordered; `strictest` where none of them is. */
@@ -87,9 +88,8 @@ export interface BatchTables extends PartTables {
   readonly requirements: RequirementTables;
 }
 
+/** The published ones. */
 export const BATCH_TABLES: BatchTables = {
   ...PART_TABLES,
-  loads: LOADS,
-  clad: CLAD,
-  requirements: REQUIREMENTS,
+  ...inForce({ loads: LOADS, clad: CLAD, requirements: REQUIREMENTS }, new Map()),
 };

@@ -22,6 +22,8 @@ import type { MaterialTables } from '@/lib/parts/material-of';
 import type { RouteTables } from '@/lib/trade/route/route';
 import type { ConditionRules } from '@/lib/trade/tempers/condition-graph';
 
+import { inForce } from './in-force';
+
 const CONDITIONS: ConditionRules = {
   designations: TEMPER_DESIGNATIONS,
   transitions: TEMPER_TRANSITIONS,
@@ -42,8 +44,7 @@ const ROUTE: RouteTables = {
 
 const MATERIAL: MaterialTables = { tempers: TEMPER_DESIGNATIONS, oldNames: OLD_NAMES };
 
-/** The published tables that questions about a part and its route are answered from. */
-export const PART_TABLES = {
+const PUBLISHED = {
   material: MATERIAL,
   conditions: CONDITIONS,
   phConditions: PH_STEEL_CONDITIONS,
@@ -54,4 +55,7 @@ export const PART_TABLES = {
   ordering: ORDERING_INFORMATION,
   commonlyMissing: MISSING_ITEMS,
 };
-export type PartTables = typeof PART_TABLES;
+export type PartTables = typeof PUBLISHED;
+
+/** The published tables that questions about a part and its route are answered from. */
+export const PART_TABLES: PartTables = inForce(PUBLISHED, new Map());

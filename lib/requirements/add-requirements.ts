@@ -11,6 +11,7 @@ import { refreshStanding } from '@/lib/batches/refresh-standing';
 import { AppError, notFound } from '@/lib/errors';
 import { newId } from '@/lib/ids';
 import { limitWords } from '@/lib/parts/limit-words';
+import { asRead } from '@/lib/parts/to-prove';
 
 import type { addRequirements as declaration } from './contract';
 
@@ -51,7 +52,7 @@ export async function addRequirements(
         batchId,
         lineId,
         seq: last + at + 1,
-        ...one,
+        ...asRead(one),
       })),
     );
   }

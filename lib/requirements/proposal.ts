@@ -1,6 +1,7 @@
 import { sourceWords } from '@/lib/batches/source-words';
 import type { LoadLine, LoadOfLines } from '@/lib/batches/loads-of-batch';
 import type { OrderingAnswers } from '@/lib/parts/ordering-answers';
+import { limitWords } from '@/lib/parts/limit-words';
 import type { ToProve } from '@/lib/parts/to-prove';
 import type { Source } from '@/lib/trade/source';
 
@@ -22,7 +23,8 @@ const LONGEST = 200;
 export function proposal(characteristic: string, limit: Limit | null, source: Source, note = ''): ToProve[] {
   if (!limit) return [];
   const sourceText = [sourceWords(source), note].filter(Boolean).join('; ').slice(0, LONGEST);
-  return [{ characteristic, ...limit, source: 'specification', sourceText }];
+  const readFrom = source.readFrom ? { ...source.readFrom, gave: limitWords(limit) } : null;
+  return [{ characteristic, ...limit, source: 'specification', sourceText, readFrom }];
 }
 
 /** The same in words that are no figure. */

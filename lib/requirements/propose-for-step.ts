@@ -30,5 +30,5 @@ export async function proposeForStep(ctx: Ctx, asked: z.output<(typeof declarati
     ...{ thickness: orNull(thickness), massG: null, areaMm2: null, sizeWords: null, route: [step] },
   };
   const line = { id: '', stepId: '', part, step, ordering: {}, pieces: null, units, load: null };
-  return { proposals: proposeRequirements(tablesOf(ctx), line) };
+  return { proposals: proposeRequirements(await tablesOf(ctx), line) };
 }

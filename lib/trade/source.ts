@@ -1,3 +1,5 @@
+import type { TableReference } from './table';
+
 /** How a value was obtained: seen in a stored text, partly so, worked out from the published rule, or recalled. */
 export const CONFIDENCES = ['read', 'read+memory', 'computed', 'memory'] as const;
 export type Confidence = (typeof CONFIDENCES)[number];
@@ -14,6 +16,10 @@ export interface Source {
   readonly certainty: Certainty;
   /** Where the text was read, when it was. */
   readonly address?: string;
+  /** Who entered it from the shop's own copy of the document; a published row has none. */
+  readonly enteredBy?: string;
+  /** The table it stands in, where the tables in use were put together. */
+  readonly readFrom?: TableReference;
 }
 
 /** A fact that everybody in the trade knows and no document was found for. */

@@ -9,6 +9,8 @@ export interface Table<Row> {
   readonly title: string;
   /** Which printing of the table this is: a document with its revision, or the shop's own title and edition. */
   readonly edition: string;
+  /** The shop's entry it was made of; a published table has none. */
+  readonly entry?: string;
   readonly rows: readonly (Row & { readonly source: Source })[];
 }
 
@@ -16,9 +18,12 @@ export interface Table<Row> {
 export interface TableReference {
   readonly table: string;
   readonly edition: string;
+  /** The shop's own entry; without it, the published table. */
+  readonly entry?: string;
 }
 
-export const referenceTo = (table: Table<unknown>): TableReference => ({
-  table: table.id,
-  edition: table.edition,
+export const referenceTo = ({ id, edition, entry }: Table<unknown>): TableReference => ({
+  table: id,
+  edition,
+  ...(entry !== undefined && { entry }),
 });

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 
 import { FrozenLine } from '@/lib/batches/frozen-line';
+import { TableReferenceShape } from '@/lib/reference/table-reference';
 import { PROCESSES } from '@/lib/trade/process';
 
 /** Sheet sizes of the papers. */
@@ -97,6 +98,8 @@ export const TravellerContent = Stated.extend({
   /** Contents from before loads were planned have none; a process without a furnace has null. */
   furnaceLoads: TravellerLoads.nullish(),
   samples: z.array(SampleOfLines).optional(),
+  /** The tables and editions that loads and samples were read from, requirements proposed, overridden checks made by. */
+  tables: z.array(TableReferenceShape).optional(),
   /** Blockers that were let pass, with who did and why. */
   overrides: z.array(
     z.object({ what: z.string(), reason: z.string(), by: z.string(), at: z.iso.datetime() }),

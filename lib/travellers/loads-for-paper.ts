@@ -8,6 +8,7 @@ import { linesWords } from '@/lib/parts/lines-words';
 import type { BatchTables } from '@/lib/reference/batch-tables';
 import { hoursLimit, limitOf, temperatureLimit, type Limit } from '@/lib/requirements/limit';
 import { sampleAsOrdered } from '@/lib/requirements/sample-as-ordered';
+import type { TableReference } from '@/lib/trade/table';
 import type { AgeingHold } from '@/lib/trade/heat-treat/ageing-cycle';
 
 import type { Paper, SampleOfLines, TravellerLoad, TravellerLoads } from './content';
@@ -29,6 +30,15 @@ export function loadsForPaper(
     apart: whyApart(tables, loads),
     sources: [...new Set(loads.flatMap((load) => load.sources.map(sourceWords)))],
   };
+}
+
+/** The tables and editions that loads and samples of these lines are read from. */
+export function tablesForPaper(tables: BatchTables, lines: readonly CheckedLine[]): TableReference[] {
+  const sampled = lines.flatMap(
+    ({ pieces, step }) => sampleAsOrdered(tables, step.ordering.sampling_plan, pieces)?.source ?? [],
+  );
+  const sources = [...loadsAsSet(tables, lines).flatMap((load) => load.sources), ...sampled];
+  return sources.flatMap(({ readFrom }) => readFrom ?? []);
 }
 
 type Row = TravellerLoad['rows'][number];

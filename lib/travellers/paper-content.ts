@@ -9,10 +9,11 @@ import { readCheckFacts, readOverrides } from '@/lib/batches/read-check-facts';
 import { specificationWords } from '@/lib/batches/step-asked';
 import { env } from '@/lib/env';
 import { notFound } from '@/lib/errors';
+import type { TableReference } from '@/lib/trade/table';
 
 import { cautionsOf } from './cautions';
 import { paperOf, TravellerContent, type OrderContent, type Paper } from './content';
-import { loadsForPaper, samplesForPaper } from './loads-for-paper';
+import { loadsForPaper, samplesForPaper, tablesForPaper } from './loads-for-paper';
 import { orderStatesOf } from './order-states';
 import { OVERRIDDEN_WORDS } from './overridden-words';
 
@@ -31,6 +32,7 @@ export async function readPaperContents(
   const head = await readHead(ctx, batchId);
   const lines = await readContentLines(ctx, batchId);
   const asked = await readRequirements(ctx, batchId);
+  const loads = await readLoads(ctx, batchId, paperOf(head.batch.currency));
   const { batch, shop, processor, contactName } = head;
   const stated = {
     paper: paperOf(batch.currency),
@@ -63,7 +65,8 @@ export async function readPaperContents(
         batch.process,
         lines.map(({ material }) => material),
       ),
-      ...(await readLoads(ctx, batchId, stated.paper)),
+      ...loads,
+      tables: await readTables(ctx, batchId, loads.tables ?? []),
       overrides: await readPassed(ctx, batchId),
       link: link === null ? null : { base: `${env.APP_URL}/b/`, linkId: link },
     },
@@ -109,7 +112,7 @@ async function readLoads(
   ctx: Ctx,
   batchId: string,
   paper: Paper,
-): Promise<Pick<TravellerContent, 'furnaceLoads' | 'samples'>> {
+): Promise<Pick<TravellerContent, 'furnaceLoads' | 'samples' | 'tables'>> {
   const [last] = await ctx.tx
     .select({ content: batchDocuments.content })
     .from(batchDocuments)
@@ -117,11 +120,43 @@ async function readLoads(
     .orderBy(desc(batchDocuments.documentVersion))
     .limit(1);
   if (last) {
-    const { furnaceLoads, samples } = TravellerContent.parse(last.content);
-    return { ...(furnaceLoads === undefined ? {} : { furnaceLoads }), ...(samples ? { samples } : {}) };
+    const { furnaceLoads, samples, tables = [] } = TravellerContent.parse(last.content);
+    return {
+      tables,
+      ...(furnaceLoads === undefined ? {} : { furnaceLoads }),
+      ...(samples ? { samples } : {}),
+    };
   }
   const { tables, lines } = await readCheckFacts(ctx, batchId);
-  return { furnaceLoads: loadsForPaper(tables, lines, paper), samples: samplesForPaper(tables, lines) };
+  return {
+    furnaceLoads: loadsForPaper(tables, lines, paper),
+    samples: samplesForPaper(tables, lines),
+    tables: tablesForPaper(tables, lines),
+  };
+}
+
+/** Each table and edition once: what loads and samples were read from, and what requirements and overrides record. */
+async function readTables(
+  ctx: Ctx,
+  batchId: string,
+  ofLoads: readonly TableReference[],
+): Promise<TableReference[]> {
+  const asked = await ctx.tx
+    .select({ readFrom: requirements.readFrom })
+    .from(requirements)
+    .where(eq(requirements.batchId, batchId))
+    .orderBy(asc(requirements.seq), asc(requirements.id));
+  const passed = await readOverrides(ctx, batchId);
+  const all = [...ofLoads, ...asked, ...passed].flatMap((one) =>
+    'table' in one ? one : (one.readFrom ?? []),
+  );
+  const once = new Map(
+    all.map(({ table, edition, entry }) => [
+      [table, edition, entry].join('\n'),
+      { table, edition, ...(entry !== undefined && { entry }) },
+    ]),
+  );
+  return [...once.values()];
 }
 
 const copied = ({ documentVersion, changes }: Version) => ({ documentVersion, changes: [...changes] });

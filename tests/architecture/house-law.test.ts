@@ -94,6 +94,7 @@ test('every verb and every query asks first whether this person may', () => {
 const RECORDED_ELSEWHERE: Record<string, string> = {
   receivePaymentEvent: 'the event is kept as it came; the job that works it off records what it changes',
   checkLotImport: 'reads only: it is a POST because it carries a whole file',
+  checkOwnTable: 'reads only: it is a POST because it carries a whole file',
   linkPayoutAccount:
     'the processor’s own account with the payment service; a processor has no chain of its own',
   inviteColleague: 'between people of a processor, which has no chain of its own; told in the log',

@@ -5,6 +5,7 @@ import { expect, test } from 'vitest';
 import { OrderOfStep } from '@/components/parts/route-of-part';
 import { Sizes } from '@/components/parts/sizes-of-part';
 import type { RouteStep } from '@/lib/parts/contract';
+import { PART_TABLES } from '@/lib/reference/published-tables';
 
 const seen = (markup: string) => markup.replace(/<[^>]*>/g, ' ').replace(/\s+/g, ' ');
 const computed = {
@@ -55,7 +56,9 @@ test('a step shows what the order states for it, and what it does not', () => {
     waiting: 0,
     used: false,
   };
-  const text = seen(renderToStaticMarkup(createElement(OrderOfStep, { step, endCondition: 'T6' })));
+  const text = seen(
+    renderToStaticMarkup(createElement(OrderOfStep, { step, endCondition: 'T6', tables: PART_TABLES })),
+  );
   expect(text).toContain('all over, no masking');
   expect(text).toMatch(/The order does not state: .*abrasion test/);
   expect(text).not.toMatch(/not state:.*contact/);
@@ -64,6 +67,7 @@ test('a step shows what the order states for it, and what it does not', () => {
       createElement(OrderOfStep, {
         step: { ...step, specification: 'House process 7', ordering: {} },
         endCondition: 'T6',
+        tables: PART_TABLES,
       }),
     ),
   ).toBe('');

@@ -4,6 +4,7 @@ import { ask, Prefetched, readOnServer } from '@/app/_kit/prefetch';
 import { readId } from '@/app/(shop)/lots/search';
 import { RevisePart } from '@/components/parts/revise-part';
 import { getPartEndpoint } from '@/lib/parts/endpoints';
+import { getTablesInForceEndpoint } from '@/lib/reference/endpoints';
 import { getMeEndpoint } from '@/lib/session/endpoints';
 
 type Props = { params: Promise<{ id: string }> };
@@ -16,7 +17,9 @@ export async function generateMetadata({ params }: Props): Promise<Metadata> {
 export default async function RevisePartPage({ params }: Props) {
   const partId = readId((await params).id);
   return (
-    <Prefetched queries={[ask(getMeEndpoint, {}), ask(getPartEndpoint, { partId })]}>
+    <Prefetched
+      queries={[ask(getMeEndpoint, {}), ask(getTablesInForceEndpoint, {}), ask(getPartEndpoint, { partId })]}
+    >
       <RevisePart partId={partId} />
     </Prefetched>
   );

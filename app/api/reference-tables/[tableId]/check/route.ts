@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { checkOwnTableEndpoint } from '@/lib/reference/endpoints';
+
+export const POST = serve(checkOwnTableEndpoint);

@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { getReferenceTableEndpoint } from '@/lib/reference/endpoints';
+
+export const GET = serve(getReferenceTableEndpoint);
