@@ -6,6 +6,7 @@ import { intake } from '@/db/schema/readings';
 import { getCertificate } from '@/lib/certificates/get-certificate';
 import { getCertificateReading } from '@/lib/readings/get-certificate-reading';
 import { listIntake } from '@/lib/readings/list-intake';
+import { readIntakeAgain } from '@/lib/readings/read-intake-again';
 import { addToIntake, assignIntake, setAsideIntake } from '@/lib/readings/settle-intake';
 
 import { makeBatch, makeDispatchedBatch } from '../../factories/batches';
@@ -92,6 +93,25 @@ test('assigned before it was read, it is read as the certificate of its batch', 
   expect(await world.as(['inspector'], (ctx) => getCertificateReading(ctx, { certificateId }))).toMatchObject(
     { state: 'read', certificateNumber: '26-00417' },
   );
+});
+
+test('a paper is read again when somebody asks for it; one that is settled is not', async () => {
+  const { world, batch, intakeId } = await setup();
+  await readAll(base);
+  await world.as(['office'], async (ctx) => {
+    await readIntakeAgain(ctx, { intakeId });
+    expect(await lastAudit(ctx, 'intake.read_again')).toMatchObject({ entityId: intakeId });
+  });
+  expect(await listed(world)).toMatchObject([{ state: 'waiting' }]);
+  await readAll(base);
+  expect(await listed(world)).toMatchObject([{ state: 'read', number: '26-00417' }]);
+  const again = (who: World, role: 'office' | 'auditor') =>
+    who.as([role], (ctx) => readIntakeAgain(ctx, { intakeId }));
+  await expect(again(world, 'auditor')).rejects.toMatchObject({ code: 'not_allowed' });
+  const stranger = await makeWorld(base.db, base.owner);
+  await expect(again(stranger, 'office')).rejects.toMatchObject({ code: 'not_found' });
+  await assign(world, intakeId, batch.id);
+  await expect(again(world, 'office')).rejects.toMatchObject({ code: 'conflict' });
 });
 
 test('settled once: a second hand is told who did it, and nothing changes', async () => {
