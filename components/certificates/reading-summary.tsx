@@ -7,6 +7,7 @@ import { getCertificate, listCertificates, recordCertificate } from '@/lib/certi
 import { getCertificateReading, readCertificateAgain } from '@/lib/readings/contract';
 import { qualityOf } from '@/lib/readings/quality';
 
+import { InFile } from './in-file';
 import { ReadFacts } from './read-facts';
 import type { Proving } from './use-proving';
 
@@ -24,6 +25,7 @@ export function ReadingSummary({ proving }: { proving: Proving }) {
   const notes = data.observations;
   return (
     <div className="border-t-heavy border-ink pt-2 pb-2">
+      <InFile proving={proving} />
       <CheckList label="What stands against it">
         {data.discrepancies.map((one) => (
           <CheckRow

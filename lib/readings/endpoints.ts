@@ -1,5 +1,6 @@
 import { endpoint } from '@/lib/api/endpoint';
 
+import { addFromFile } from './add-from-file';
 import * as contract from './contract';
 import { correctReading } from './correct-reading';
 import { getCertificateReading } from './get-certificate-reading';
@@ -12,6 +13,7 @@ import { addToIntake, assignIntake, setAsideIntake } from './settle-intake';
 export const getCertificateReadingEndpoint = endpoint(contract.getCertificateReading, getCertificateReading);
 export const readCertificateAgainEndpoint = endpoint(contract.readCertificateAgain, readCertificateAgain);
 export const correctReadingEndpoint = endpoint(contract.correctReading, correctReading);
+export const addFromFileEndpoint = endpoint(contract.addFromFile, addFromFile);
 export const listIntakeEndpoint = endpoint(intakeContract.listIntake, listIntake);
 export const addToIntakeEndpoint = endpoint(intakeContract.addToIntake, addToIntake);
 export const readIntakeAgainEndpoint = endpoint(intakeContract.readIntakeAgain, readIntakeAgain);

@@ -11,7 +11,7 @@ import { addToIntake, assignIntake, setAsideIntake } from '@/lib/readings/settle
 
 import { makeBatch, makeDispatchedBatch } from '../../factories/batches';
 import { makeFile } from '../../factories/evidence';
-import { certificatePaper, HEAT_TREAT, makePaperWorld, readAll } from '../../factories/papers';
+import { certificatePaper, HEAT_TREAT, makePaperWorld, readAll, stackOf } from '../../factories/papers';
 import { lastAudit } from '../../factories/standing';
 import { makeWorld, type World } from '../../factories/world';
 import { openDatabase } from '../open-database';
@@ -60,6 +60,43 @@ test('a paper waits, is read, and its batch is named with what speaks for it', a
     reasons: expect.arrayContaining(['It names order TP-0002.']) as unknown,
   });
   expect(row?.candidates.slice(1).filter(({ isClear }) => isClear)).toEqual([]);
+});
+
+test('of a file with two certificates both batches are named, and the rest is offered where one was proved', async () => {
+  const world = await makePaperWorld(base);
+  const [one, two] = [await sentBatch(world), await sentBatch(world)];
+  const content = await stackOf([
+    await certificatePaper(world, one.id, { number: '26-00501' }),
+    await certificatePaper(world, two.id, { number: '26-00502' }),
+  ]);
+  const fileId = await world.as(['office'], (ctx) =>
+    keepFile(ctx, { purpose: 'certificate', name: 'stack.pdf', mediaType: 'application/pdf', content }),
+  );
+  const { id: intakeId } = await add(world, fileId);
+  await readAll(base);
+  expect((await listed(world))[0]?.candidates).toMatchObject([
+    {
+      batchId: one.id,
+      isClear: true,
+      reasons: expect.arrayContaining(['26-00501: It names order TP-0001.']) as unknown,
+    },
+    {
+      batchId: two.id,
+      isClear: true,
+      reasons: expect.arrayContaining(['26-00502: It names order TP-0002.']) as unknown,
+    },
+  ]);
+  const { certificateId } = await assign(world, intakeId, two.id);
+  expect(await world.as(['inspector'], (ctx) => getCertificateReading(ctx, { certificateId }))).toMatchObject(
+    {
+      certificateNumber: '26-00502',
+      discrepancies: [],
+      inFile: [
+        { number: '26-00501', taken: [], fits: [{ batchId: one.id, isClear: true }] },
+        { number: '26-00502', isThis: true },
+      ],
+    },
+  );
 });
 
 test('assigned, it is a certificate of that batch with its reading, and is gone from the list', async () => {
