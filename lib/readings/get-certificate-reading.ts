@@ -83,6 +83,8 @@ export async function getCertificateReading(
     facts: own.facts,
     inFile: inFile.certificates,
     ...proposed,
+    proposals: proposed.proposals.map((one) => onThePage(one, own)),
+    lines: proposed.lines.map((one) => onThePage(one, own)),
   };
 }
 
@@ -106,6 +108,12 @@ async function todayOf(ctx: Ctx): Promise<string> {
     .where(eq(shops.id, shopOf(ctx)));
   return calendarDay(ctx.now, shop?.zone ?? 'UTC');
 }
+
+/** Without what only a person knows: it stands nowhere that could be pointed at. */
+const onThePage = <Rests extends { facts: number[] }>(rests: Rests, { facts }: StatedCertificate): Rests => ({
+  ...rests,
+  facts: rests.facts.filter((at) => at < facts.length),
+});
 
 /** The words of the pages that this certificate stands on. */
 function wordsOf({ facts }: StatedCertificate, pages: readonly KeptPage[]): string[] {

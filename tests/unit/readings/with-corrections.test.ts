@@ -75,3 +75,12 @@ test('a field is one of the certificate’s own', () => {
   expect(hasField(STATED, 'lines[0].rev')).toBe(true);
   expect(hasField(STATED, 'toString')).toBe(false);
 });
+
+test('what the machine did not find is stated once a person says so, on the page of the certificate', () => {
+  const { signature_present, facts } = withCorrections(STATED, [
+    { field: 'signature_present', corrected: 'yes' },
+  ]);
+  expect(signature_present).toBe(true);
+  expect(facts.at(-1)).toMatchObject({ field: 'signature_present', value: 'yes', confidence: 1, page: 1 });
+  expect(facts.slice(0, -1)).toEqual(STATED.facts);
+});
