@@ -14,6 +14,7 @@ import {
   addToIntake,
   assignIntake,
   listIntake,
+  readIntakeAgain,
   setAsideIntake,
   type IntakeRow,
 } from '@/lib/readings/intake-contract';
@@ -104,7 +105,7 @@ function IntakePaper({ row, mayAdd }: { row: IntakeRow; mayAdd: boolean }) {
           Reading it.
         </p>
       )}
-      {row.fault && <p className="text-second">{row.fault}</p>}
+      {row.fault && <Unreadable row={row} fault={row.fault} mayAdd={mayAdd} />}
       {row.state !== 'waiting' && row.candidates.length === 0 && (
         <p className="text-second">No open order fits it. Add it at its batch, or set it aside.</p>
       )}
@@ -124,7 +125,7 @@ function IntakePaper({ row, mayAdd }: { row: IntakeRow; mayAdd: boolean }) {
             </Button>
           )}
           <span>{candidate.processor}.</span>
-          <span className="text-quiet">{candidate.reasons.join(', ')}</span>
+          <span className="text-quiet">{candidate.reasons.join(' ')}</span>
         </div>
       ))}
       {mayAdd &&
@@ -136,6 +137,24 @@ function IntakePaper({ row, mayAdd }: { row: IntakeRow; mayAdd: boolean }) {
           </Button>
         ))}
     </li>
+  );
+}
+
+function Unreadable({ row, fault, mayAdd }: { row: IntakeRow; fault: string; mayAdd: boolean }) {
+  const again = useWrite(readIntakeAgain, { refreshes: [listIntake] });
+  return (
+    <p className="text-second">
+      {fault}{' '}
+      {mayAdd && (
+        <Button
+          look="word"
+          busy={again.isPending}
+          onClick={() => again.mutateAsync({ intakeId: row.id }).catch(tellFailure)}
+        >
+          Have it read again
+        </Button>
+      )}
+    </p>
   );
 }
 

@@ -85,6 +85,7 @@ function yourWords(line: ProvedLine, entered: number | null): string {
 function LineOpen({ line, proving, canEdit }: { line: ProvedLine; proving: Proving; canEdit: boolean }) {
   const mayHold = useMay('nonconformance.raise');
   const [holding, setHolding] = useState(false);
+  const why = proving.reading.piecesOf(line.lineNo)?.why;
   return (
     <tr role="row">
       <td role="cell" colSpan={7} className="border-b-heavy border-ink bg-bench">
@@ -104,6 +105,7 @@ function LineOpen({ line, proving, canEdit }: { line: ProvedLine; proving: Provi
             )}
             . <Elsewhere line={line} />
           </p>
+          {why && <p className="text-second">As read: {why}</p>}
           {canEdit && <Entering line={line} proving={proving} />}
           {proving.canEdit && line.coverable === 0 && (
             <p className="text-second text-quiet">

@@ -30,7 +30,7 @@ export function ReadFacts({ proving }: { proving: Proving }) {
         All {data.facts.length} things read <span className="lw-word-button">Show</span>
       </summary>
       <Table label="What the machine read" columns={COLUMNS} dense>
-        {data.facts.map((fact, at) => (
+        {[...data.facts, ...notFound(data)].map((fact, at) => (
           <FactRow key={at} fact={fact} proving={proving} corrections={data.corrections} />
         ))}
       </Table>
@@ -38,8 +38,29 @@ export function ReadFacts({ proving }: { proving: Proving }) {
   );
 }
 
+/** What is on every good certificate: where the machine missed it, a person says what stands there. */
+const ON_EVERY = [
+  'certificate_number',
+  'certificate_date',
+  'purchase_order',
+  'signature_present',
+  'conformance_statement',
+];
+
+const notFound = ({ facts }: CertificateReading): FactRowProps['fact'][] =>
+  ON_EVERY.filter((field) => !facts.some((fact) => fact.field === field)).map((field) => ({
+    field,
+    value: null,
+    raw: 'not found',
+    page: null,
+    confidence: null,
+  }));
+
 interface FactRowProps {
-  fact: CertificateReading['facts'][number];
+  fact: Pick<CertificateReading['facts'][number], 'field' | 'value' | 'raw'> & {
+    page: number | null;
+    confidence: number | null;
+  };
   proving: Proving;
   corrections: CertificateReading['corrections'];
 }
@@ -60,9 +81,7 @@ function FactRow({ fact, proving, corrections }: FactRowProps) {
           fact.raw
         )}
       </Cell>
-      <Cell>
-        <HowWell quality={qualityOf(fact.confidence)} />
-      </Cell>
+      <Cell>{fact.confidence !== null && <HowWell quality={qualityOf(fact.confidence)} />}</Cell>
       <Cell right>{fact.page}</Cell>
       <Cell right>
         {proving.canEdit &&

@@ -1,11 +1,13 @@
 'use client';
 import { useWrite } from '@/components/api/use-api';
+import { useMay } from '@/components/session/use-me';
 import { Button } from '@/components/ui/button';
 import { CheckList, CheckRow } from '@/components/ui/check-row';
 import { getCertificate, listCertificates, recordCertificate } from '@/lib/certificates/contract';
 import { getCertificateReading, readCertificateAgain } from '@/lib/readings/contract';
 import { qualityOf } from '@/lib/readings/quality';
 
+import { InFile } from './in-file';
 import { ReadFacts } from './read-facts';
 import type { Proving } from './use-proving';
 
@@ -23,6 +25,7 @@ export function ReadingSummary({ proving }: { proving: Proving }) {
   const notes = data.observations;
   return (
     <div className="border-t-heavy border-ink pt-2 pb-2">
+      <InFile proving={proving} />
       <CheckList label="What stands against it">
         {data.discrepancies.map((one) => (
           <CheckRow
@@ -49,21 +52,22 @@ export function ReadingSummary({ proving }: { proving: Proving }) {
 
 function NotRead({ proving, fault }: { proving: Proving; fault: string | null }) {
   const { certificate } = proving.data;
+  const mayAsk = useMay('certificate.add');
   const again = useWrite(readCertificateAgain, { refreshes: [getCertificateReading] });
   return (
     <CheckList label="Reading">
       <CheckRow
-        level="note"
+        level={fault === null ? 'note' : 'warn'}
         sentence={fault ?? 'The machine has not read this file.'}
         rest="The file is kept as it came; prove it by eye."
         waysOut={
-          proving.canEdit && (
+          mayAsk && (
             <Button
               look="word"
               busy={again.isPending}
               onClick={() => again.mutateAsync({ certificateId: certificate.id }).catch(() => undefined)}
             >
-              Have it read
+              {fault === null ? 'Have it read' : 'Have it read again'}
             </Button>
           )
         }

@@ -76,6 +76,12 @@ function Chart({ data }: { data: ChartDetail }) {
           {drawn && 'fault' in drawn && (
             <Failing says={drawn.fault} stands="Say below how it is to be understood, or read it by eye." />
           )}
+          {requirement && drawn && 'drawing' in drawn && data.fault && (
+            <Failing
+              says={data.fault}
+              stands="Below is what this browser reads in it; keep it to have it read anew."
+            />
+          )}
           {drawn && 'drawing' in drawn && <FurnaceChart drawing={drawn.drawing} />}
         </div>
         <div className="flex min-w-0 flex-col gap-6">

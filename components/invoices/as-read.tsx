@@ -1,12 +1,12 @@
 'use client';
 import { useFormContext } from 'react-hook-form';
 
-import { useLazyRead } from '@/components/api/use-api';
+import { useLazyRead, useWrite } from '@/components/api/use-api';
 import { Button } from '@/components/ui/button';
 import { CheckList, CheckRow } from '@/components/ui/check-row';
 import { showMessage } from '@/components/ui/message';
 import { CURRENCIES } from '@/lib/money';
-import { getInvoiceReading, type InvoiceReading } from '@/lib/invoices/reading-contract';
+import { getInvoiceReading, readInvoiceAgain, type InvoiceReading } from '@/lib/invoices/reading-contract';
 
 import { typedAmount } from './amount-field';
 import { whatOf, type EnterIn } from './enter-values';
@@ -28,8 +28,7 @@ export function AsRead({ invoiceId }: { invoiceId: string }) {
         Reading the invoice. You can begin by eye.
       </p>
     );
-  if (data.state === 'unreadable')
-    return <p className="pb-2 text-second text-quiet">{data.fault} Enter it by eye.</p>;
+  if (data.state === 'unreadable') return <NotRead invoiceId={invoiceId} fault={data.fault} />;
   const takeOver = () => {
     const before = form.getValues();
     form.reset(valuesAsRead(data, before), { keepDefaultValues: true });
@@ -54,6 +53,30 @@ export function AsRead({ invoiceId }: { invoiceId: string }) {
           {data.totalMinor !== null && `, ${typedAmount(data.totalMinor)}`}. The machine proposes; you enter.
         </span>
       </div>
+    </div>
+  );
+}
+
+function NotRead({ invoiceId, fault }: { invoiceId: string; fault: string | null }) {
+  const again = useWrite(readInvoiceAgain, { refreshes: [getInvoiceReading] });
+  return (
+    <div className="pb-3">
+      <CheckList label="Reading">
+        <CheckRow
+          level="warn"
+          sentence={fault}
+          rest="The file is kept as it came; enter it by eye."
+          waysOut={
+            <Button
+              look="word"
+              busy={again.isPending}
+              onClick={() => again.mutateAsync({ invoiceId }).catch(() => undefined)}
+            >
+              Have it read again
+            </Button>
+          }
+        />
+      </CheckList>
     </div>
   );
 }

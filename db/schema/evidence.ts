@@ -28,6 +28,8 @@ export const certificates = pgTable(
     shopId: shopColumn(),
     batchId: uuid('batch_id').notNull(),
     fileId: uuid('file_id').notNull(),
+    /** Which of the certificates in its file, from 0, where a person said so; null: the one that speaks of its batch. */
+    place: integer('place'),
     number: text('number'),
     datedOn: date('dated_on'),
     sentBy: text('sent_by').notNull(),
@@ -38,6 +40,7 @@ export const certificates = pgTable(
     createdAt: createdColumn(),
   },
   (t) => [
+    check('place_from_0', sql`${t.place} >= 0`),
     unique('certificates_shop').on(t.shopId, t.id),
     unique('certificates_file').on(t.fileId),
     index('certificates_batch').on(t.batchId),

@@ -1,5 +1,5 @@
 import { sql } from 'drizzle-orm';
-import { bigint, index, pgEnum, pgPolicy, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
+import { bigint, foreignKey, index, pgEnum, pgPolicy, pgTable, text, unique, uniqueIndex, uuid } from 'drizzle-orm/pg-core';
 
 import { FILE_PURPOSES, FILE_STATES } from '@/lib/files/purpose';
 
@@ -9,7 +9,10 @@ import { shops } from './organisations';
 export const filePurpose = pgEnum('file_purpose', FILE_PURPOSES);
 export const fileState = pgEnum('file_state', FILE_STATES);
 
-/** One file as received. Its bytes lie in object storage under `storageKey` and never change once verified. */
+/**
+ * One file as received. Its bytes lie in object storage under `storageKey` and never change once verified. A file that
+ * holds papers of several batches has a row in each; all but the first say of which they are copies.
+ */
 export const files = pgTable(
   'files',
   {
@@ -25,6 +28,7 @@ export const files = pgTable(
     size: bigint('size', { mode: 'number' }).notNull(),
     sha256: text('sha256'),
     storageKey: text('storage_key').notNull(),
+    copyOf: uuid('copy_of'),
     state: fileState('state').notNull().default('awaited'),
     refusal: text('refusal'),
     uploadedBy: text('uploaded_by').notNull(),
@@ -33,7 +37,10 @@ export const files = pgTable(
   },
   (t) => [
     unique('files_shop').on(t.shopId, t.id),
-    unique('files_storage_key').on(t.storageKey),
+    uniqueIndex('files_storage_key')
+      .on(t.storageKey)
+      .where(sql`copy_of is null`),
+    foreignKey({ columns: [t.shopId, t.copyOf], foreignColumns: [t.shopId, t.id] }),
     index('files_batch').on(t.batchId),
     index('files_hash').on(t.shopId, t.sha256),
     ownShopOnly(),

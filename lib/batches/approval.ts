@@ -39,7 +39,11 @@ export function approvalStanding(approvals: readonly Approval[], asked: Asked): 
   return { state: nearest.validTo < asked.on ? 'expired' : 'not_yet', approval: nearest };
 }
 
-function covers(approval: Approval, { process, specification }: Asked): boolean {
+/** Whether its scope takes in a process to a specification, on whatever day. */
+export function covers(
+  approval: Pick<Approval, 'processes' | 'specifications'>,
+  { process, specification }: Omit<Asked, 'on'>,
+): boolean {
   if (!approval.processes.includes(process)) return false;
   return (
     approval.specifications.length === 0 ||

@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, ne, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, isNull, ne, sql } from 'drizzle-orm';
 
 import { batches, batchLines, requirements } from '@/db/schema/batches';
 import { certificates, charts, coverage, decisions, signatures } from '@/db/schema/evidence';
@@ -68,7 +68,8 @@ export async function getCertificate(ctx: Ctx, { certificateId }: { certificateI
     others: await othersOf(ctx, { certificateId, batchId: batch.id }),
     charts: await chartsOf(ctx, batch.id),
     sameFile:
-      file.sha256 === null
+      // Another certificate of the file, or one for several batches: a person took it up as such.
+      file.sha256 === null || certificate.place !== null
         ? []
         : await sameFileElsewhere(ctx, { certificateId, batchId: batch.id, sha256: file.sha256 }),
     dispatchedByYou,
@@ -247,7 +248,7 @@ async function sameFileElsewhere(ctx: Ctx, { certificateId, batchId, sha256 }: O
     .from(files)
     .innerJoin(certificates, eq(certificates.fileId, files.id))
     .innerJoin(batches, eq(batches.id, certificates.batchId))
-    .where(and(eq(files.sha256, sha256), ne(certificates.id, certificateId)))
+    .where(and(eq(files.sha256, sha256), ne(certificates.id, certificateId), isNull(certificates.place)))
     .orderBy(desc(certificates.id))
     .limit(10);
   return rows.map((row) => ({

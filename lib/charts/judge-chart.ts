@@ -2,12 +2,11 @@ import { eq } from 'drizzle-orm';
 import type { z } from 'zod';
 
 import { charts } from '@/db/schema/evidence';
-import { readings } from '@/db/schema/readings';
 import { recordAudit } from '@/lib/audit/record-audit';
 import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
 import { notFound } from '@/lib/errors';
-import { readOnceMore, requestReading } from '@/lib/readings/request-reading';
+import { readAgain } from '@/lib/readings/request-reading';
 
 import type { JudgeChart } from './contract';
 
@@ -17,15 +16,10 @@ export async function judgeChart(
   { chartId, requirement, corrections }: z.output<typeof JudgeChart>,
 ) {
   authorize(ctx, 'certificate.prove');
-  const [found] = await ctx.tx
-    .select({ fileId: charts.fileId, readingId: readings.id })
-    .from(charts)
-    .leftJoin(readings, eq(readings.fileId, charts.fileId))
-    .where(eq(charts.id, chartId));
+  const [found] = await ctx.tx.select({ fileId: charts.fileId }).from(charts).where(eq(charts.id, chartId));
   if (!found) throw notFound('chart');
   const ask = { requirement, corrections };
-  if (found.readingId) await readOnceMore(ctx, found.readingId, ask);
-  else await requestReading(ctx, { fileId: found.fileId, kind: 'chart', ask });
+  await readAgain(ctx, { fileId: found.fileId, kind: 'chart', ask });
   await recordAudit(ctx, { action: 'chart.judge', entity: 'chart', entityId: chartId, after: ask });
   return { state: 'waiting' as const };
 }

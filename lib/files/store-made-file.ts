@@ -1,4 +1,4 @@
-import { and, eq } from 'drizzle-orm';
+import { eq, isNull } from 'drizzle-orm';
 import { createHash } from 'node:crypto';
 
 import { files } from '@/db/schema/files';
@@ -45,7 +45,7 @@ export async function storeMadeFile(
         createdAt: ctx.now,
         verifiedAt: ctx.now,
       })
-      .onConflictDoNothing({ target: files.storageKey })
+      .onConflictDoNothing({ target: files.storageKey, where: isNull(files.copyOf) })
       .returning({ id: files.id });
     if (added) {
       await recordAudit(ctx, {
@@ -65,7 +65,7 @@ export async function storeMadeFile(
     const [here] = await ctx.tx
       .select({ id: files.id })
       .from(files)
-      .where(and(eq(files.storageKey, storageKey)));
+      .where(eq(files.storageKey, storageKey));
     if (!here) throw new Error(`file ${storageKey} is neither new nor here`);
     return { fileId: here.id, sha256 };
   });

@@ -8,13 +8,15 @@ import { addInvoice, enterInvoice } from './enter-invoice';
 import { getInvoiceReading } from './get-invoice-reading';
 import { payInvoice } from './pay-invoice';
 import * as queries from './queries';
-import { getInvoiceReading as readingDeclared } from './reading-contract';
+import { readInvoiceAgain } from './read-invoice-again';
+import * as readingContract from './reading-contract';
 import { refuseInvoice } from './refuse-invoice';
 import { waivePayment } from './waive-payment';
 
 export const listInvoicesEndpoint = endpoint(contract.listInvoices, queries.listInvoices);
 export const getInvoiceEndpoint = endpoint(contract.getInvoice, queries.getInvoice);
-export const getInvoiceReadingEndpoint = endpoint(readingDeclared, getInvoiceReading);
+export const getInvoiceReadingEndpoint = endpoint(readingContract.getInvoiceReading, getInvoiceReading);
+export const readInvoiceAgainEndpoint = endpoint(readingContract.readInvoiceAgain, readInvoiceAgain);
 export const addInvoiceEndpoint = endpoint(contract.addInvoice, addInvoice);
 export const enterInvoiceEndpoint = endpoint(contract.enterInvoice, enterInvoice);
 export const clearDifferenceEndpoint = endpoint(contract.clearDifference, clearDifference);

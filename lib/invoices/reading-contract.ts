@@ -40,3 +40,14 @@ export const getInvoiceReading = declare({
   input: z.object({ invoiceId: Id }),
   response: InvoiceReading,
 });
+
+export const readInvoiceAgain = declare({
+  id: 'readInvoiceAgain',
+  method: 'post',
+  path: '/invoices/{invoiceId}/read-again',
+  summary: 'Have the machine read an invoice once more',
+  side: 'shop',
+  permission: 'invoice.enter',
+  input: z.object({ invoiceId: Id }),
+  response: z.object({ state: z.enum(READING_STATES) }),
+});

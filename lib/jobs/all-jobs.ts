@@ -1,4 +1,5 @@
 import { assembleDossierJob } from './definitions/assemble-dossier';
+import { giveUpReadingJob } from './definitions/give-up-reading';
 import { payInvoiceJob } from './definitions/pay-invoice';
 import { readDocumentJob } from './definitions/read-document';
 import { renderDocumentsJob } from './definitions/render-documents';
@@ -14,4 +15,5 @@ export const ALL_JOBS: readonly Job[] = [
   payInvoiceJob,
   workPaymentEventJob,
   readDocumentJob,
+  giveUpReadingJob,
 ];

@@ -2,6 +2,7 @@ const WHAT: Record<string, string> = {
   'render-documents': 'The traveller and the purchase order were not made.',
   'pay-invoice': 'The payment was not handed to the payment service.',
   'work-payment-event': 'What the payment service told was not entered.',
+  'read-document': 'The machine did not read a file that came in. A person reads it.',
   'assemble-dossier': 'The dossier was not put together.',
 };
 

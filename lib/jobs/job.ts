@@ -11,6 +11,8 @@ export interface JobTools {
   now(): Date;
   /** Which attempt this is, from 1. */
   attempt: number;
+  /** Why it is run: what the job that was given up for it said last. Null where nothing was given up. */
+  gaveUp: string | null;
 }
 
 export interface Job<Payload extends z.ZodType = z.ZodType> {

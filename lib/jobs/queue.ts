@@ -36,6 +36,7 @@ export async function enqueue<Payload extends z.ZodType>(
     retryDelay: declared.retryDelayS,
     retryBackoff: true,
     expireInMinutes: 10,
+    ...('givesUpTo' in declared && { deadLetter: declared.givesUpTo }),
     ...(options.once === undefined ? {} : { singletonKey: options.once }),
     ...(options.startAfter === undefined ? {} : { startAfter: options.startAfter }),
   });

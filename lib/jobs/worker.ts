@@ -1,5 +1,6 @@
 import { createServer } from 'node:http';
 import PgBoss from 'pg-boss';
+import { z } from 'zod';
 
 import { connect, withTenant, type Db, type Tenant } from '@/db/client';
 import type { Ctx } from '@/lib/auth/context';
@@ -48,17 +49,33 @@ async function listen(boss: PgBoss, db: Db, job: Job): Promise<void> {
       { pollingIntervalSeconds: 1, batchSize: 1, includeMetadata: true },
       async (taken) => {
         for (const one of taken)
-          await runJob(db, job, { data: one.data, attempt: one.retryCount + 1, id: one.id });
+          await runJob(db, job, {
+            data: one.data,
+            attempt: one.retryCount + 1,
+            id: one.id,
+            gaveUp: saidLast(one.output),
+          });
       },
     );
   }
 }
 
+/** Of a job that was given up: an error of its own, or what the queue says of one whose worker died. */
+export function saidLast(output: unknown): string | null {
+  const said = LastWords.safeParse(output);
+  return said.success ? (said.data.message ?? said.data.value?.message ?? null) : null;
+}
+
+const LastWords = z.object({
+  message: z.string().optional(),
+  value: z.object({ message: z.string() }).optional(),
+});
+
 /** Runs one job as the worker does; tests call it through `runJobs`. */
 export async function runJob(
   db: Db,
   job: Job,
-  { data, attempt, id: jobId }: { data: unknown; attempt: number; id: string },
+  { data, attempt, id: jobId, gaveUp }: Pick<JobTools, 'attempt' | 'gaveUp'> & { data: unknown; id: string },
 ): Promise<void> {
   const within = <T>(tenant: Tenant, work: (ctx: Ctx) => Promise<T>): Promise<T> =>
     withTenant(db, tenant, (tx) =>
@@ -73,6 +90,7 @@ export async function runJob(
     );
   const tools: JobTools = {
     attempt,
+    gaveUp,
     now: () => new Date(),
     inShop: (shopId, work) => within({ kind: 'shop', shopId, personId: null }, work),
     atDoor: (work) => within({ kind: 'door' }, work),

@@ -6,6 +6,7 @@ import { VERDICTS } from '@/lib/certificates/verdict';
 import { Discrepancy } from '@/lib/evidence/certificate/certificate';
 import { Fact } from '@/lib/evidence/fact';
 
+import { Candidate } from './intake-contract';
 import { KeptPage } from './kept-reading';
 import { READING_STATES } from './reading-state';
 
@@ -17,6 +18,21 @@ export const Proposal = z.object({
   /** Places in `facts`. */
   facts: z.array(z.int()),
   confidence: z.number().nullable(),
+});
+
+/** One of the certificates that a file holds, where it holds several or is for several batches. */
+export const InFile = z.object({
+  /** From 0, in the order of the pages. */
+  place: z.int(),
+  number: z.string().nullable(),
+  order: z.string().nullable(),
+  parts: z.array(z.string()),
+  /** The one that is looked at. */
+  isThis: z.boolean(),
+  /** The certificates that it was taken up as. */
+  taken: z.array(z.object({ certificateId: Id, batchId: Id, batchNumber: z.string() })),
+  /** Batches that it speaks of and was not taken up for. */
+  fits: z.array(Candidate.omit({ processor: true })),
 });
 
 export const Correction = z.object({
@@ -39,8 +55,17 @@ export const CertificateReading = z.object({
   facts: z.array(Fact),
   /** Of the page with that number; for choosing words on its picture. */
   pages: z.array(KeptPage),
+  inFile: z.array(InFile),
   proposals: z.array(Proposal),
-  lines: z.array(z.object({ lineNo: z.int(), pieces: z.int(), facts: z.array(z.int()) })),
+  lines: z.array(
+    z.object({
+      lineNo: z.int(),
+      pieces: z.int(),
+      facts: z.array(z.int()),
+      /** Whether all pieces of the line are accounted for, and on which papers. */
+      why: z.string(),
+    }),
+  ),
   discrepancies: z.array(Discrepancy),
   observations: z.array(z.string()),
   corrections: z.array(Correction),
@@ -84,4 +109,22 @@ export const correctReading = declare({
   permission: 'certificate.prove',
   input: CorrectReading,
   response: z.object({ field: z.string() }),
+});
+
+export const AddFromFile = z.object({
+  certificateId: Id,
+  /** Which of the certificates in its file, as its reading counts them. */
+  place: z.int().min(0),
+  batchId: Id,
+});
+
+export const addFromFile = declare({
+  id: 'addFromFile',
+  method: 'post',
+  path: '/certificates/{certificateId}/of-file',
+  summary: 'Take up another certificate of the same file, or the same one for another batch',
+  side: 'shop',
+  permission: 'certificate.add',
+  input: AddFromFile,
+  response: z.object({ certificateId: Id }),
 });

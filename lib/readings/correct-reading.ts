@@ -11,8 +11,8 @@ import type { StatedCertificate } from '@/lib/evidence/certificate/certificate';
 import type { CorrectReading } from './contract';
 import { findReading } from './find-reading';
 import { KeptCertificates } from './kept-reading';
-import { ofBatchFirst } from './of-batch-first';
 import { readBatchOrder } from './orders-of-batch';
+import { ownPlace } from './own-place';
 import { hasField, withCorrection } from './with-corrections';
 
 /** Puts a person's value beside the machine's; the later of two corrections of a field counts. */
@@ -31,7 +31,8 @@ export async function correctReading(
     );
   const { certificates: read } = KeptCertificates.parse(reading.content);
   const batch = await readBatchOrder(ctx, locked.batch.id);
-  const [stated] = ofBatchFirst(read, batch?.order ?? null);
+  const { place } = locked.certificate;
+  const stated = read[ownPlace(read, { place, order: batch?.order ?? null })];
   const fact = stated?.facts.find((one) => one.field === field);
   if (stated) refuseWhatDoesNotFit(stated, { field, corrected });
   await ctx.tx.insert(readingCorrections).values({

@@ -1,22 +1,23 @@
-import { and, asc, eq, isNull, ne, or, sql } from 'drizzle-orm';
+import { asc, eq } from 'drizzle-orm';
 import type { z } from 'zod';
 
-import { batches } from '@/db/schema/batches';
-import { certificates } from '@/db/schema/evidence';
-import { files } from '@/db/schema/files';
-import { processors, shops } from '@/db/schema/organisations';
-import { readingCorrections, readings } from '@/db/schema/readings';
+import { shops } from '@/db/schema/organisations';
+import { readingCorrections } from '@/db/schema/readings';
 import { authorize } from '@/lib/auth/authorize';
 import { shopOf, type Ctx } from '@/lib/auth/context';
 import { calendarDay } from '@/lib/day-words';
-import type { SeenCertificate } from '@/lib/evidence/certificate/certificate';
+import type { StatedCertificate } from '@/lib/evidence/certificate/certificate';
+import type { Page } from '@/lib/evidence/page';
 
+import { asOfBatch } from './as-of-batch';
 import type { CertificateReading } from './contract';
 import { findReading } from './find-reading';
+import { readInFile } from './in-file';
 import { KeptCertificates, type KeptPage } from './kept-reading';
-import { ofBatchFirst } from './of-batch-first';
 import { readBatchOrder } from './orders-of-batch';
+import { ownPlace } from './own-place';
 import { propose } from './propose';
+import { seenBefore } from './seen-before';
 import { withCorrections } from './with-corrections';
 
 type Answer = z.input<typeof CertificateReading>;
@@ -30,6 +31,7 @@ const NOTHING = {
   certificateDate: null,
   facts: [],
   pages: [],
+  inFile: [],
   proposals: [],
   lines: [],
   discrepancies: [],
@@ -48,17 +50,29 @@ export async function getCertificateReading(
   const head = { ...NOTHING, state: reading.state, fault: reading.fault, seconds: reading.seconds };
   if (reading.state !== 'read') return head;
   const { file, certificates: read } = KeptCertificates.parse(reading.content);
+  const pages = reading.pages as KeptPage[];
   const batch = await readBatchOrder(ctx, certificate.batchId);
   const corrections = await correctionsOf(ctx, reading.id);
-  const [own, ...others] = ofBatchFirst(read, batch?.order ?? null);
-  const base = { ...head, recognised: file.recognised, corrections, pages: reading.pages as KeptPage[] };
+  const base = { ...head, recognised: file.recognised, corrections, pages };
+  const place = ownPlace(read, { place: certificate.place, order: batch?.order ?? null });
+  const own = read[place];
   if (!own || !batch) return base;
-  const stated = withCorrections(own, corrections);
+  const { sha256, recognised: isRecognised } = file;
+  const inFile = await readInFile(ctx, { sha256, isRecognised, read, place, batch });
+  const others = inFile.orders.filter(({ batchId }) => batchId !== batch.batchId).map(({ order }) => order);
+  const corrected = withCorrections(own, corrections);
+  const stated = asOfBatch(corrected, { order: batch.order, others, words: wordsOf(own, pages) });
   const proposed = propose(batch, {
     stated,
-    file: { sha256: file.sha256, recognised: file.recognised, pages: hiddenPages(file.hidden) },
-    others,
-    seen: await seenBefore(ctx, certificate, stated.certificate_number),
+    file: {
+      sha256,
+      recognised: isRecognised,
+      pages: pages.map((page, at) => seenPage(page, at === 0 ? file.hidden : [])),
+    },
+    // Those that are taken up stand among what was seen, with their pieces.
+    others: read.filter((_, at) => at !== place && !inFile.taken.includes(at)),
+    orders: others,
+    seen: await seenBefore(ctx, { certificate, sha256, stated: corrected, place, batch }),
     today: await todayOf(ctx),
   });
   return {
@@ -67,7 +81,10 @@ export async function getCertificateReading(
     certificateDate: stated.certificate_date,
     // As the machine read them; what a person put in their place stands among the corrections.
     facts: own.facts,
+    inFile: inFile.certificates,
     ...proposed,
+    proposals: proposed.proposals.map((one) => onThePage(one, own)),
+    lines: proposed.lines.map((one) => onThePage(one, own)),
   };
 }
 
@@ -84,62 +101,6 @@ const correctionsOf = (ctx: Ctx, readingId: string) =>
     .where(eq(readingCorrections.readingId, readingId))
     .orderBy(asc(readingCorrections.id));
 
-/** Papers with the same number or the same bytes, and the other papers of this batch with their pieces. */
-async function seenBefore(
-  ctx: Ctx,
-  { id, batchId, fileId }: { id: string; batchId: string; fileId: string },
-  number: string | null,
-): Promise<SeenCertificate[]> {
-  const [own] = await ctx.tx.select({ sha256: files.sha256 }).from(files).where(eq(files.id, fileId));
-  const rows = await ctx.tx
-    .select({
-      number: certificates.number,
-      setAsideAt: certificates.setAsideAt,
-      sha256: files.sha256,
-      order: batches.orderNumber,
-      processor: processors.name,
-      content: readings.content,
-    })
-    .from(certificates)
-    .innerJoin(files, eq(files.id, certificates.fileId))
-    .innerJoin(batches, eq(batches.id, certificates.batchId))
-    .innerJoin(processors, eq(processors.id, batches.processorId))
-    .leftJoin(readings, eq(readings.fileId, certificates.fileId))
-    .where(
-      and(
-        ne(certificates.id, id),
-        or(
-          eq(certificates.batchId, batchId),
-          number === null ? undefined : bearsNumber(number),
-          own?.sha256 == null ? undefined : eq(files.sha256, own.sha256),
-        ),
-      ),
-    )
-    .limit(50);
-  return rows.map((row) => {
-    const read = KeptCertificates.safeParse(row.content);
-    const [first] = read.success ? read.data.certificates : [];
-    return {
-      processor: row.processor,
-      certificate_number: row.number ?? first?.certificate_number ?? null,
-      purchase_order: row.order,
-      sha256: row.sha256,
-      // What was set aside accounts for no pieces.
-      lines: row.setAsideAt === null ? (first?.lines ?? []) : [],
-    };
-  });
-}
-
-/** As entered by a person; until then as read. */
-const bearsNumber = (number: string) =>
-  or(
-    eq(certificates.number, number),
-    and(
-      isNull(certificates.number),
-      sql`${readings.content} #>> '{certificates,0,certificate_number}' = ${number}`,
-    ),
-  );
-
 async function todayOf(ctx: Ctx): Promise<string> {
   const [shop] = await ctx.tx
     .select({ zone: shops.zone })
@@ -148,19 +109,26 @@ async function todayOf(ctx: Ctx): Promise<string> {
   return calendarDay(ctx.now, shop?.zone ?? 'UTC');
 }
 
-/** Where hidden words stand was not kept: that there are some is what counts. */
-const hiddenPages = (hidden: readonly string[]) =>
-  hidden.length === 0
-    ? []
-    : [
-        {
-          number: 1,
-          width: 0,
-          height: 0,
-          turned: 0 as const,
-          origin: 'text_layer' as const,
-          words: [],
-          marks: [],
-          hidden: hidden.map((text) => ({ text, box: [0, 0, 0, 0] as const, why: 'invisible' as const })),
-        },
-      ];
+/** Without what only a person knows: it stands nowhere that could be pointed at. */
+const onThePage = <Rests extends { facts: number[] }>(rests: Rests, { facts }: StatedCertificate): Rests => ({
+  ...rests,
+  facts: rests.facts.filter((at) => at < facts.length),
+});
+
+/** The words of the pages that this certificate stands on. */
+function wordsOf({ facts }: StatedCertificate, pages: readonly KeptPage[]): string[] {
+  const own = new Set(facts.map(({ page }) => page));
+  return pages.flatMap(({ number, words }) => (own.has(number) ? words.map(([text]) => text) : []));
+}
+
+/** A page as it is compared; where hidden words stand was not kept: that there are some is what counts. */
+const seenPage = ({ number, width, height, words }: KeptPage, hidden: readonly string[]): Page => ({
+  number,
+  width,
+  height,
+  turned: 0,
+  origin: 'text_layer',
+  words: words.map(([text, ...box]) => ({ text, box, confidence: 1 })),
+  marks: [],
+  hidden: hidden.map((text) => ({ text, box: [0, 0, 0, 0], why: 'invisible' })),
+});

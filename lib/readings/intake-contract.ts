@@ -53,6 +53,17 @@ export const addToIntake = declare({
   response: z.object({ id: Id }),
 });
 
+export const readIntakeAgain = declare({
+  id: 'readIntakeAgain',
+  method: 'post',
+  path: '/intake/{intakeId}/read-again',
+  summary: 'Have the machine read a paper without a batch once more',
+  side: 'shop',
+  permission: 'certificate.add',
+  input: z.object({ intakeId: Id }),
+  response: z.object({ state: z.enum(READING_STATES) }),
+});
+
 export const assignIntake = declare({
   id: 'assignIntake',
   method: 'post',

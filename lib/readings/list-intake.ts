@@ -5,14 +5,11 @@ import { files } from '@/db/schema/files';
 import { intake, readings } from '@/db/schema/readings';
 import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
-import { matchOrder } from '@/lib/evidence/certificate/match/match-order';
 
-import type { IntakeRow } from './intake-contract';
+import type { Candidate, IntakeRow } from './intake-contract';
 import { KeptCertificates } from './kept-reading';
 import { readOpenOrders, type BatchOrder } from './orders-of-batch';
-
-/** Enough to choose from; what is further down has hardly a word in common. */
-const MOST_CANDIDATES = 3;
+import { speaksOf } from './speaks-of';
 
 /** Papers whose batch nobody has named yet, the oldest first, matched anew to the orders that are open now. */
 export async function listIntake(ctx: Ctx): Promise<{ rows: z.input<typeof IntakeRow>[] }> {
@@ -40,33 +37,40 @@ export async function listIntake(ctx: Ctx): Promise<{ rows: z.input<typeof Intak
         processor: stated?.processor ?? null,
         number: stated?.certificate_number ?? null,
         order: stated?.purchase_order ?? null,
-        candidates: stated && read.success ? candidatesOf(stated, open, read.data.file.recognised) : [],
+        candidates: read.success ? candidatesOf(read.data, open) : [],
       };
     }),
   };
 }
 
+/** Batches that any of the certificates in the file speaks of; what speaks for each names its certificate where there are several. */
 function candidatesOf(
-  stated: Parameters<typeof matchOrder>[0],
+  { file, certificates: read }: KeptCertificates,
   open: readonly BatchOrder[],
-  isRecognised: boolean,
-) {
-  const { candidates, matched } = matchOrder(
-    stated,
-    open.map(({ order }) => order),
-    { isRecognised },
-  );
-  return candidates.slice(0, MOST_CANDIDATES).flatMap(({ order, reasons }) => {
-    const batch = open.find((one) => one.order === order);
-    if (!batch) return [];
-    return [
-      {
+): z.input<typeof Candidate>[] {
+  const found = new Map<string, z.input<typeof Candidate>>();
+  for (const stated of read) {
+    const spoken = speaksOf(
+      stated,
+      open.map(({ order }) => order),
+      { isRecognised: file.recognised },
+    );
+    for (const { order, isClear, reasons } of spoken) {
+      const batch = open.find((one) => one.order === order);
+      if (!batch) continue;
+      const known = found.get(batch.batchId);
+      const name = read.length > 1 ? `${stated.certificate_number ?? 'One without a number'}: ` : '';
+      found.set(batch.batchId, {
         batchId: batch.batchId,
         batchNumber: order.batch,
         processor: order.processor.name,
-        isClear: matched === order,
-        reasons: [...reasons],
-      },
-    ];
-  });
+        isClear: isClear || known?.isClear === true,
+        reasons: [
+          ...(known?.reasons ?? []),
+          ...reasons.map((reason, at) => (at === 0 ? name + reason : reason)),
+        ],
+      });
+    }
+  }
+  return [...found.values()].toSorted((a, b) => Number(b.isClear) - Number(a.isClear));
 }

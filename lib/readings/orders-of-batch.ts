@@ -1,8 +1,9 @@
 import { and, asc, eq, inArray, isNotNull, notInArray } from 'drizzle-orm';
 
 import { batches, batchLines, requirements } from '@/db/schema/batches';
-import { processors, shops } from '@/db/schema/organisations';
+import { approvals, processors, shops } from '@/db/schema/organisations';
 import { shopOf, type Ctx } from '@/lib/auth/context';
+import { covers } from '@/lib/batches/approval';
 import { calendarDay } from '@/lib/day-words';
 import type { Order, Requirements } from '@/lib/evidence/order';
 
@@ -19,6 +20,7 @@ export interface AskedRequirement {
 /** A batch as a document from its processor is compared with it. */
 export interface BatchOrder {
   batchId: string;
+  processorId: string;
   /** Without what must be proved; that differs from line to line. */
   order: Order;
   requirements: AskedRequirement[];
@@ -33,9 +35,20 @@ export async function readBatchOrder(ctx: Ctx, batchId: string): Promise<BatchOr
   return order ?? null;
 }
 
+/** The orders of several batches; those that were not dispatched yet are left out. */
+export const readBatchOrders = (ctx: Ctx, batchIds: readonly string[]): Promise<BatchOrder[]> =>
+  batchIds.length === 0
+    ? Promise.resolve([])
+    : readOrders(ctx, and(inArray(batches.id, [...batchIds]), isNotNull(batches.dispatchedAt)));
+
 /** Every order that a paper may still come for. */
-export const readOpenOrders = (ctx: Ctx): Promise<BatchOrder[]> =>
-  readOrders(ctx, and(isNotNull(batches.dispatchedAt), notInArray(batches.stage, [...WITHOUT_PAPERS])));
+export const readOpenOrders = (ctx: Ctx): Promise<BatchOrder[]> => readOrders(ctx, isOpen);
+
+/** Those that were given to one processor. */
+export const readOpenOrdersOf = (ctx: Ctx, processorId: string): Promise<BatchOrder[]> =>
+  readOrders(ctx, and(isOpen, eq(batches.processorId, processorId)));
+
+const isOpen = and(isNotNull(batches.dispatchedAt), notInArray(batches.stage, [...WITHOUT_PAPERS]));
 
 async function readOrders(ctx: Ctx, which: ReturnType<typeof and>): Promise<BatchOrder[]> {
   const [shop] = await ctx.tx
@@ -55,6 +68,11 @@ async function readOrders(ctx: Ctx, which: ReturnType<typeof and>): Promise<Batc
     .from(batchLines)
     .where(inArray(batchLines.batchId, ids))
     .orderBy(asc(batchLines.lineNo));
+  const approved = await ctx.tx
+    .select()
+    .from(approvals)
+    .where(inArray(approvals.processorId, [...new Set(found.map(({ batch }) => batch.processorId))]))
+    .orderBy(asc(approvals.validFrom));
   const asked = await ctx.tx
     .select()
     .from(requirements)
@@ -64,10 +82,17 @@ async function readOrders(ctx: Ctx, which: ReturnType<typeof and>): Promise<Batc
     const ofBatch = lines.filter((line) => line.batchId === batch.id);
     return {
       batchId: batch.id,
+      processorId: batch.processorId,
       order: {
         batch: batch.number,
         po: batch.orderNumber,
-        processor: { name: processor, address },
+        processor: {
+          name: processor,
+          address,
+          approvals: approved
+            .filter(({ processorId }) => processorId === batch.processorId)
+            .map((one) => approvalOf(one, batch, shop.zone)),
+        },
         process: batch.process,
         dispatched: batch.dispatchedAt && calendarDay(batch.dispatchedAt, shop.zone),
         due: batch.wantedBackOn,
@@ -96,6 +121,21 @@ async function readOrders(ctx: Ctx, which: ReturnType<typeof and>): Promise<Batc
         })),
     };
   });
+}
+
+/** An approval as the comparison takes it: for the batch's process where its scope takes that in, until it was withdrawn. */
+function approvalOf(
+  approval: typeof approvals.$inferSelect,
+  { process, specification }: Pick<typeof batches.$inferSelect, 'process' | 'specification'>,
+  zone: string,
+) {
+  const { validFrom, validTo, withdrawnAt } = approval;
+  const withdrawnOn = withdrawnAt && calendarDay(withdrawnAt, zone);
+  return {
+    processes: covers(approval, { process, specification }) ? [process] : [],
+    valid_from: validFrom,
+    valid_to: withdrawnOn !== null && withdrawnOn < validTo ? withdrawnOn : validTo,
+  };
 }
 
 /** What is asked in figures, requirement by requirement. */

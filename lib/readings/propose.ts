@@ -5,6 +5,7 @@ import type {
   StatedCertificate,
 } from '@/lib/evidence/certificate/certificate';
 import { compare, type Comparison } from '@/lib/evidence/certificate/compare/compare';
+import { pairLines, type LinePair, type PairedBy } from '@/lib/evidence/certificate/compare/pair-lines';
 import type { Fact } from '@/lib/evidence/fact';
 import type { Order, Requirements } from '@/lib/evidence/order';
 import type { OpenedFile } from '@/lib/evidence/page';
@@ -30,6 +31,7 @@ export interface LineProposal {
   lineNo: number;
   pieces: number;
   facts: number[];
+  why: string;
 }
 
 export interface Proposed {
@@ -43,6 +45,8 @@ interface Compared {
   stated: StatedCertificate;
   file: Pick<OpenedFile, 'sha256' | 'recognised' | 'pages'>;
   others: readonly StatedCertificate[];
+  /** Other orders that it may speak of. */
+  orders?: readonly Order[];
   seen: readonly SeenCertificate[];
   /** `YYYY-MM-DD` */
   today: string;
@@ -96,7 +100,10 @@ const NEEDED: readonly (readonly [RegExp, RegExp])[] = [
  * Each requirement is compared by itself: two may ask for different figures of the same thing, one of the whole batch
  * and one of a line, and each has its own answer.
  */
-export function propose({ order, requirements }: BatchOrder, compared: Compared): Proposed {
+export function propose(
+  { order, requirements }: Pick<BatchOrder, 'order' | 'requirements'>,
+  compared: Compared,
+): Proposed {
   const known = new Map<string, Comparison>();
   /** Many lines ask for the same: each question is answered once. */
   const against = (asked: Requirements): Comparison => {
@@ -112,7 +119,18 @@ export function propose({ order, requirements }: BatchOrder, compared: Compared)
   }));
   const outcomes = [...known.values()];
   const discrepancies = unique(outcomes.flatMap((outcome) => outcome.discrepancies));
-  const facts = compared.stated.facts.map((fact) => ({ ...fact, field: named(fact.field, compared.stated) }));
+  const { stated } = compared;
+  const { pairs } = pairLines(order, stated.lines);
+  /** Rows of the certificate for a line; every row is of the whole batch. */
+  const rowsOfLine = (lineNo: number | null) =>
+    new Set(
+      lineNo === null
+        ? stated.lines.keys()
+        : pairs
+            .filter(({ ordered }) => ordered.line === lineNo)
+            .flatMap(({ stated: rows }) => rows.map(({ line }) => stated.lines.indexOf(line))),
+    );
+  const facts = stated.facts.map((fact) => ({ ...fact, field: named(fact.field, stated) }));
   return {
     proposals: answers.flatMap(({ requirement, answer }) =>
       answer && requirement.figures
@@ -121,9 +139,9 @@ export function propose({ order, requirements }: BatchOrder, compared: Compared)
             facts,
             own: placesOf(facts, requirement.figures.fields),
           })
-        : paperProposal(requirement, discrepancies, ownLines(facts, order, requirement.lineNo)),
+        : paperProposal(requirement, discrepancies, ownLines(facts, rowsOfLine(requirement.lineNo))),
     ),
-    lines: order.lines.flatMap((line) => lineProposal(line, compared.stated)),
+    lines: pairs.flatMap((pair) => lineProposal(pair, { stated, verdicts: unasked.verdicts })),
     discrepancies,
     observations: [...new Set(outcomes.flatMap((outcome) => outcome.observations))],
   };
@@ -185,22 +203,14 @@ function paperProposal(
   ];
 }
 
-/** The facts with the lines that are of this line of the order named so; of the whole batch all are. */
-function ownLines(facts: readonly Fact[], { lines }: Order, lineNo: number | null): Fact[] {
-  const part = lines.find(({ line }) => line === lineNo)?.part_number;
-  const own = new Set(
-    facts.flatMap(({ field, value }) => {
-      const at = /^lines\[(\d+)\]\.part_number$/.exec(field)?.[1];
-      return at !== undefined && (part === undefined || value === part) ? [at] : [];
-    }),
-  );
-  return facts.map((fact) => ({
+/** The facts with the rows that are of this line of the order named so. */
+const ownLines = (facts: readonly Fact[], rows: ReadonlySet<number>): Fact[] =>
+  facts.map((fact) => ({
     ...fact,
     field: fact.field.replace(/^lines\[(\d+)\]/, (counted, at: string) =>
-      own.has(at) ? 'lines[own]' : counted,
+      rows.has(Number(at)) ? 'lines[own]' : counted,
     ),
   }));
-}
 
 /** What was read poorly is never proposed as met. */
 const asWellAsRead = (proposal: Proposal): Proposal =>
@@ -208,18 +218,27 @@ const asWellAsRead = (proposal: Proposal): Proposal =>
     ? { ...proposal, verdict: 'cannot_tell', why: 'It was read poorly. Look at the page.' }
     : proposal;
 
-function lineProposal(line: Order['lines'][number], stated: StatedCertificate): LineProposal[] {
-  const at = stated.lines.findIndex(({ part_number }) => part_number === line.part_number);
-  const pieces = stated.lines[at]?.qty_accepted;
-  if (pieces == null) return [];
+/** The pieces of all rows that speak of the line; a row under a number that only resembles it is a person's to decide. */
+function lineProposal(
+  { ordered, stated: rows }: LinePair,
+  { stated, verdicts }: { stated: StatedCertificate; verdicts: readonly RequirementVerdict[] },
+): LineProposal[] {
+  const own = rows.filter(({ by, line }) => SURE.has(by) && line.qty_accepted !== null);
+  if (own.length === 0) return [];
+  const places = own.map(({ line }) => stated.lines.indexOf(line)).join('|');
   return [
     {
-      lineNo: line.line,
-      pieces,
-      facts: placesOf(stated.facts, new RegExp(`^lines\\[${at}\\]\\.(part_number|qty_accepted)$`)),
+      lineNo: ordered.line,
+      pieces: own.reduce((sum, { line }) => sum + (line.qty_accepted ?? 0), 0),
+      facts: placesOf(stated.facts, new RegExp(`^lines\\[(?:${places})\\]\\.(part_number|qty_accepted)$`)),
+      why:
+        verdicts.find(({ requirement, line }) => line === ordered.line && /^quantity /.test(requirement))
+          ?.why ?? '',
     },
   ];
 }
+
+const SURE: ReadonlySet<PairedBy> = new Set(['same', 'lookalike']);
 
 /** A field with its cycle or reading named by step or kind instead of counted. */
 function named(field: string, { cycles, readings }: StatedCertificate): string {

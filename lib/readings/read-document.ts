@@ -7,6 +7,7 @@ import { askedOfChart } from '@/lib/charts/asked-of-chart';
 import type { JobTools } from '@/lib/jobs/job';
 import { readObject } from '@/lib/storage/object-store';
 
+import { GIVEN_UP } from './give-up-reading';
 import { READER_EDITION } from './kept-reading';
 import { figuresOf, readBatchOrder } from './orders-of-batch';
 import type { ChartAsk, readDocumentQueue } from './read-document-queue';
@@ -27,6 +28,7 @@ export async function readDocument(
       .select({
         kind: readings.kind,
         state: readings.state,
+        faultCode: readings.faultCode,
         name: files.name,
         storageKey: files.storageKey,
         batchId: files.batchId,
@@ -35,7 +37,8 @@ export async function readDocument(
       .innerJoin(files, eq(files.id, readings.fileId))
       .where(eq(readings.id, readingId)),
   );
-  if (!found || found.state !== 'waiting') return;
+  // One that was given up is read after all where an admin has its job tried once more.
+  if (!found || (found.state !== 'waiting' && found.faultCode !== GIVEN_UP)) return;
   const began = tools.now();
   const ask =
     found.kind === 'chart' ? (given ?? (await askOfBatch(tools, shopId, found.batchId))) : undefined;
@@ -55,12 +58,12 @@ export async function readDocument(
       .set({
         ...('fault' in outcome
           ? { state: 'unreadable', faultCode: outcome.fault.code, fault: outcome.fault.message }
-          : { state: 'read', content: outcome.content, pages: outcome.pages }),
+          : { state: 'read', faultCode: null, fault: null, content: outcome.content, pages: outcome.pages }),
         reader: READER_EDITION,
         seconds: (readAt.getTime() - began.getTime()) / 1000,
         readAt,
       })
-      .where(and(eq(readings.id, readingId), eq(readings.state, 'waiting'))),
+      .where(and(eq(readings.id, readingId), eq(readings.state, found.state))),
   );
 }
 

@@ -64,7 +64,10 @@ const readFile = ({ sha256, kind, recognised, pages }: OpenedFile): ReadFile => 
   kind,
   recognised,
   pages: pages.length,
-  hidden: pages.flatMap(({ hidden }) => hidden.map(({ text }) => text)),
+  // The layer of letters behind a scan is no deceit: the picture was read.
+  hidden: pages.flatMap(({ hidden, origin }) =>
+    hidden.flatMap(({ text, why }) => (origin === 'recognised' && why === 'invisible' ? [] : [text])),
+  ),
 });
 
 const tenth = (points: number) => Math.round(points * 10) / 10;

@@ -22,11 +22,16 @@ export async function requestReading(
   if (made) await enqueue(ctx, readDocumentQueue, { shopId: shopOf(ctx), readingId, ...(ask && { ask }) });
 }
 
-/** Has it read once more: after the reader learned something, or because the first time it took too long. */
-export async function readOnceMore(ctx: Ctx, readingId: string, ask?: ChartAsk): Promise<void> {
-  await ctx.tx
+/** Has a file read once more, or for the first time: after the reader learned something, or because it took too long. */
+export async function readAgain(
+  ctx: Ctx,
+  { fileId, kind, ask }: { fileId: string; kind: ReadingKind; ask?: ChartAsk },
+): Promise<void> {
+  const [known] = await ctx.tx
     .update(readings)
     .set({ state: 'waiting', faultCode: null, fault: null })
-    .where(eq(readings.id, readingId));
-  await enqueue(ctx, readDocumentQueue, { shopId: shopOf(ctx), readingId, ...(ask && { ask }) });
+    .where(eq(readings.fileId, fileId))
+    .returning({ readingId: readings.id });
+  if (known) await enqueue(ctx, readDocumentQueue, { shopId: shopOf(ctx), ...known, ...(ask && { ask }) });
+  else await requestReading(ctx, { fileId, kind, ...(ask && { ask }) });
 }

@@ -85,7 +85,8 @@ export async function setAsideIntake(ctx: Ctx, { intakeId, reason }: z.output<ty
   return { id: intakeId };
 }
 
-async function lockIntake(ctx: Ctx, intakeId: string) {
+/** Locks a paper that still waits for its batch. */
+export async function lockIntake(ctx: Ctx, intakeId: string) {
   const [paper] = await ctx.tx.select().from(intake).where(eq(intake.id, intakeId)).for('update');
   if (!paper) throw notFound('paper');
   if (paper.settledAt !== null)

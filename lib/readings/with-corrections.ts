@@ -1,4 +1,5 @@
 import { StatedCertificate } from '@/lib/evidence/certificate/certificate';
+import type { Fact } from '@/lib/evidence/fact';
 
 interface FieldCorrection {
   field: string;
@@ -54,10 +55,16 @@ const isOwn = (holder: unknown, step: string): holder is Holder =>
   Object.hasOwn(holder, step) &&
   (!Array.isArray(holder) || /^\d+$/.test(step));
 
-const believed = (facts: StatedCertificate['facts'], { field, corrected }: FieldCorrection) =>
-  facts.map((fact) =>
-    fact.field === field ? { ...fact, value: corrected === '' ? null : corrected, confidence: 1 } : fact,
-  );
+/** What the machine did not find is stated all the same once a person says so; it stands behind what the machine read. */
+function believed(facts: StatedCertificate['facts'], { field, corrected }: FieldCorrection): Fact[] {
+  const value = corrected === '' ? null : corrected;
+  if (facts.some((fact) => fact.field === field))
+    return facts.map((fact) => (fact.field === field ? { ...fact, value, confidence: 1 } : fact));
+  const page = facts[0]?.page ?? 1;
+  return value === null
+    ? facts
+    : [...facts, { field, value, raw: corrected, page, box: [0, 0, 0, 0], confidence: 1 }];
+}
 
 /** What the words may stand for, the strictest first; the shape of the field decides. */
 function valuesOf(words: string): unknown[] {

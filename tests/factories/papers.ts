@@ -1,4 +1,5 @@
 import { asc, eq } from 'drizzle-orm';
+import { PDFDocument } from 'pdf-lib';
 
 import { keepFile } from '@/db/seed/keep-file';
 import { makeForm } from '@/db/seed/papers';
@@ -32,6 +33,8 @@ export interface Stated {
   pieces?: readonly number[];
   statements?: readonly string[];
   signed?: boolean;
+  /** Another batch that it is for as well, with all its pieces. */
+  also?: string;
 }
 
 export const CONFORMS =
@@ -63,6 +66,7 @@ export function asked(characteristic: string, limit: string, unit = ''): ToProve
 /** The certificate of a batch as a processor prints it: for all its pieces unless it is said otherwise. */
 export async function certificatePaper(world: World, batchId: string, stated: Stated = {}): Promise<Buffer> {
   const { batch, lines, processor } = await orderOf(world, batchId);
+  const also = stated.also === undefined ? null : await orderOf(world, stated.also);
   return makeForm({
     ...headOf(processor),
     title: 'Certificate of conformance',
@@ -73,9 +77,10 @@ export async function certificatePaper(world: World, batchId: string, stated: St
       ['Traveller', batch.number],
       ['Process', 'Solution heat treat and age'],
       ['Specification', 'AMS 2770 rev R'],
+      ...(also ? ([['Remark', `with ${also.batch.orderNumber}`]] as const) : []),
     ],
     columns: ['Part number', 'Rev', 'Description', 'Lot', 'Quantity'],
-    lines: lines.map(({ frozen, pieces }, at) => ({
+    lines: [...lines, ...(also?.lines ?? [])].map(({ frozen, pieces }, at) => ({
       cells: [
         frozen?.partNumber ?? '',
         frozen?.partRevision ?? '',
@@ -87,6 +92,16 @@ export async function certificatePaper(world: World, batchId: string, stated: St
     statements: stated.statements ?? DONE_RIGHT,
     signed: stated.signed === false ? null : { name: 'Ada Marsh', role: 'Quality', day: '2026-06-17' },
   });
+}
+
+/** Papers one after the other in one file, as a scanner makes it of a stack. */
+export async function stackOf(papers: readonly Buffer[]): Promise<Buffer> {
+  const stack = await PDFDocument.create();
+  for (const paper of papers) {
+    const from = await PDFDocument.load(paper);
+    for (const page of await stack.copyPages(from, from.getPageIndices())) stack.addPage(page);
+  }
+  return Buffer.from(await stack.save());
 }
 
 /** An invoice of the batch for its first line. */

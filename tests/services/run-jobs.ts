@@ -3,7 +3,7 @@ import PgBoss from 'pg-boss';
 
 import type { Db } from '@/db/client';
 import type { Job } from '@/lib/jobs/job';
-import { runJob } from '@/lib/jobs/worker';
+import { runJob, saidLast } from '@/lib/jobs/worker';
 
 interface Ran {
   id: string;
@@ -28,6 +28,7 @@ export async function runJobs(base: { db: Db; owner: Db }, job: Job): Promise<Ra
       data: taken.data,
       attempt: taken.retryCount + 1,
       id: taken.id,
+      gaveUp: saidLast(taken.output),
     }).then(
       () => null,
       (reason: unknown) => (reason instanceof Error ? reason : new Error(String(reason))),

@@ -19,6 +19,7 @@ const base = openDatabase();
 
 const toolsOf = (here: World): JobTools => ({
   attempt: 1,
+  gaveUp: null,
   now: () => TODAY,
   inShop: (shopId, work) =>
     withTenant(here.db, { kind: 'shop', shopId, personId: null }, (tx) =>

@@ -1,12 +1,14 @@
 import { expect, test } from 'vitest';
 
-import { enterInvoice } from '@/lib/invoices/enter-invoice';
+import { addInvoice, enterInvoice } from '@/lib/invoices/enter-invoice';
 import { getInvoiceReading } from '@/lib/invoices/get-invoice-reading';
 import { getInvoice } from '@/lib/invoices/queries';
+import { readInvoiceAgain } from '@/lib/invoices/read-invoice-again';
 
 import { makeDispatchedBatch } from '../../factories/batches';
 import { entering, pieceLine } from '../../factories/invoices';
 import { handIn, invoicePaper, makePaperWorld, readAll } from '../../factories/papers';
+import { lastAudit } from '../../factories/standing';
 import { makeWorld, type World } from '../../factories/world';
 import { openDatabase } from '../open-database';
 
@@ -83,4 +85,32 @@ test('a second copy of an invoice that was entered for another batch is named', 
   expect((await readingOf(world, copyId)).discrepancies.map(({ code }) => code)).toEqual([
     'duplicate_invoice',
   ]);
+});
+
+test('an invoice is read again when the office asks for it, and the trail says who asked', async () => {
+  const { world, invoiceId } = await readInvoice({ total: '50.00' });
+  await world.as(['office'], async (ctx) => {
+    await readInvoiceAgain(ctx, { invoiceId });
+    expect(await lastAudit(ctx, 'invoice.read_again')).toMatchObject({ entityId: invoiceId });
+  });
+  expect(await readingOf(world, invoiceId)).toMatchObject({ state: 'waiting', number: null });
+  expect(await readAll(base)).toBe(1);
+  expect(await readingOf(world, invoiceId)).toMatchObject({ state: 'read', number: 'INV-8417' });
+});
+
+test('reading an invoice again is refused to an auditor, to another shop, and where there is no file', async () => {
+  const { world, batch, invoiceId } = await readInvoice({ total: '50.00' });
+  await expect(world.as(['auditor'], (ctx) => readInvoiceAgain(ctx, { invoiceId }))).rejects.toMatchObject({
+    code: 'not_allowed',
+  });
+  const stranger = await makeWorld(base.db, base.owner);
+  await expect(stranger.as(['office'], (ctx) => readInvoiceAgain(ctx, { invoiceId }))).rejects.toMatchObject({
+    code: 'not_found',
+  });
+  const { id: typed } = await world.as(['office'], (ctx) =>
+    addInvoice(ctx, { batchId: batch.id, fileId: null }),
+  );
+  await expect(
+    world.as(['office'], (ctx) => readInvoiceAgain(ctx, { invoiceId: typed })),
+  ).rejects.toMatchObject({ code: 'conflict', message: expect.stringContaining('without a file') as string });
 });

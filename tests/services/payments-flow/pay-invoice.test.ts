@@ -419,6 +419,7 @@ describe('nothing happens twice', () => {
     let transactions = 0;
     const dying: JobTools = {
       attempt: 1,
+      gaveUp: null,
       now: () => new Date(),
       atDoor: () => Promise.reject(new Error('not asked for')),
       inShop: (_, work) => {

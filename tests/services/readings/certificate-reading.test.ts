@@ -1,6 +1,7 @@
 import { eq } from 'drizzle-orm';
 import { expect, test } from 'vitest';
 
+import { approvals } from '@/db/schema/organisations';
 import { readings } from '@/db/schema/readings';
 import { setRequirements } from '@/lib/batches/set-requirements';
 import { dispatchBatch } from '@/lib/batches/dispatch-batch';
@@ -179,6 +180,23 @@ test('a certificate whose number was used for another batch is named, entered by
   expect(await reused()).toMatchObject([
     { stated: 'TP-0001', message: 'Certificate 26-00555 was received before for order TP-0001.' },
   ]);
+});
+
+test('an approval that did not hold on the day of the work is named, and one that did is not', async () => {
+  const { world, certificateId } = await readOf();
+  const approvalOf = (given: Partial<typeof approvals.$inferInsert>) =>
+    base.owner.update(approvals).set(given).where(eq(approvals.shopId, world.shopId));
+  const told = async () =>
+    (await readingOf(world, certificateId)).discrepancies.filter(({ code }) => code === 'approval_not_valid');
+  expect(await told()).toEqual([]);
+  await approvalOf({ validTo: '2026-06-16' });
+  expect(await told()).toMatchObject([{ stated: '2026-06-17', severity: 'blocks' }]);
+  await approvalOf({ validTo: '2027-01-31', withdrawnAt: new Date('2026-06-16T12:00:00Z') });
+  expect(await told()).toHaveLength(1);
+  await approvalOf({ withdrawnAt: null, specifications: ['AMS 2759'] });
+  expect(await told()).toMatchObject([{ message: expect.stringContaining('does not cover it') as string }]);
+  await approvalOf({ specifications: ['AMS2770'] });
+  expect(await told()).toEqual([]);
 });
 
 test('pieces on other papers of the batch count together; those of one that was set aside do not', async () => {

@@ -1,5 +1,6 @@
 import { expect, test } from 'vitest';
 
+import { getCertificate } from '@/lib/certificates/get-certificate';
 import { setAsideCertificate } from '@/lib/certificates/set-aside-certificate';
 import { correctReading } from '@/lib/readings/correct-reading';
 import { getCertificateReading } from '@/lib/readings/get-certificate-reading';
@@ -20,13 +21,14 @@ import { openDatabase } from '../open-database';
 const base = openDatabase();
 
 /** A certificate on which the hardness reads 58 where 63 is asked, and 8 pieces of 10. */
-async function setup({ read = true } = {}) {
+async function setup({ read = true, signed = true } = {}) {
   const world = await makePaperWorld(base);
   const batch = await world.as(['lead'], (ctx) =>
     makeDispatchedBatch(ctx, world.processorId, { requirements: HEAT_TREAT }),
   );
   const content = await certificatePaper(world, batch.id, {
     pieces: [8],
+    signed,
     statements: DONE_RIGHT.with(3, 'Hardness: HRB 58'),
   });
   const certificateId = await handIn(world, batch.id, { kind: 'certificate', content });
@@ -64,6 +66,22 @@ test('a correction counts in what is proposed; what was read is shown beside it,
       after: { field: 'lines[0].qty_accepted', corrected: '10' },
     });
   });
+});
+
+test('a signature that the machine missed and a person sees is proposed as met, and points at nothing', async () => {
+  const { world, certificateId } = await setup({ signed: false });
+  const signature = async () => {
+    const { facts, proposals } = await readingOf(world, certificateId);
+    const { requirements } = await world.as(['inspector'], (ctx) => getCertificate(ctx, { certificateId }));
+    const id = requirements.find(({ characteristic }) => characteristic === 'Signature and date')?.id;
+    const proposal = proposals.find(({ requirementId }) => requirementId === id);
+    return { verdict: proposal?.verdict, restsOn: proposal?.facts.map((at) => facts[at]?.field) };
+  };
+  expect(await signature()).toEqual({ verdict: 'does_not_meet', restsOn: ['certificate_date'] });
+  await correct(world, certificateId, 'signature_present', 'yes');
+  expect(await signature()).toEqual({ verdict: 'meets', restsOn: ['certificate_date'] });
+  await correct(world, certificateId, 'signature_present', 'no');
+  expect((await signature()).verdict).toBe('does_not_meet');
 });
 
 test('of two corrections of a field the later counts, and both stay', async () => {

@@ -6,11 +6,12 @@ import { intake } from '@/db/schema/readings';
 import { getCertificate } from '@/lib/certificates/get-certificate';
 import { getCertificateReading } from '@/lib/readings/get-certificate-reading';
 import { listIntake } from '@/lib/readings/list-intake';
+import { readIntakeAgain } from '@/lib/readings/read-intake-again';
 import { addToIntake, assignIntake, setAsideIntake } from '@/lib/readings/settle-intake';
 
 import { makeBatch, makeDispatchedBatch } from '../../factories/batches';
 import { makeFile } from '../../factories/evidence';
-import { certificatePaper, HEAT_TREAT, makePaperWorld, readAll } from '../../factories/papers';
+import { certificatePaper, HEAT_TREAT, makePaperWorld, readAll, stackOf } from '../../factories/papers';
 import { lastAudit } from '../../factories/standing';
 import { makeWorld, type World } from '../../factories/world';
 import { openDatabase } from '../open-database';
@@ -61,6 +62,43 @@ test('a paper waits, is read, and its batch is named with what speaks for it', a
   expect(row?.candidates.slice(1).filter(({ isClear }) => isClear)).toEqual([]);
 });
 
+test('of a file with two certificates both batches are named, and the rest is offered where one was proved', async () => {
+  const world = await makePaperWorld(base);
+  const [one, two] = [await sentBatch(world), await sentBatch(world)];
+  const content = await stackOf([
+    await certificatePaper(world, one.id, { number: '26-00501' }),
+    await certificatePaper(world, two.id, { number: '26-00502' }),
+  ]);
+  const fileId = await world.as(['office'], (ctx) =>
+    keepFile(ctx, { purpose: 'certificate', name: 'stack.pdf', mediaType: 'application/pdf', content }),
+  );
+  const { id: intakeId } = await add(world, fileId);
+  await readAll(base);
+  expect((await listed(world))[0]?.candidates).toMatchObject([
+    {
+      batchId: one.id,
+      isClear: true,
+      reasons: expect.arrayContaining(['26-00501: It names order TP-0001.']) as unknown,
+    },
+    {
+      batchId: two.id,
+      isClear: true,
+      reasons: expect.arrayContaining(['26-00502: It names order TP-0002.']) as unknown,
+    },
+  ]);
+  const { certificateId } = await assign(world, intakeId, two.id);
+  expect(await world.as(['inspector'], (ctx) => getCertificateReading(ctx, { certificateId }))).toMatchObject(
+    {
+      certificateNumber: '26-00502',
+      discrepancies: [],
+      inFile: [
+        { number: '26-00501', taken: [], fits: [{ batchId: one.id, isClear: true }] },
+        { number: '26-00502', isThis: true },
+      ],
+    },
+  );
+});
+
 test('assigned, it is a certificate of that batch with its reading, and is gone from the list', async () => {
   const { world, batch, fileId, intakeId } = await setup();
   await readAll(base);
@@ -92,6 +130,25 @@ test('assigned before it was read, it is read as the certificate of its batch', 
   expect(await world.as(['inspector'], (ctx) => getCertificateReading(ctx, { certificateId }))).toMatchObject(
     { state: 'read', certificateNumber: '26-00417' },
   );
+});
+
+test('a paper is read again when somebody asks for it; one that is settled is not', async () => {
+  const { world, batch, intakeId } = await setup();
+  await readAll(base);
+  await world.as(['office'], async (ctx) => {
+    await readIntakeAgain(ctx, { intakeId });
+    expect(await lastAudit(ctx, 'intake.read_again')).toMatchObject({ entityId: intakeId });
+  });
+  expect(await listed(world)).toMatchObject([{ state: 'waiting' }]);
+  await readAll(base);
+  expect(await listed(world)).toMatchObject([{ state: 'read', number: '26-00417' }]);
+  const again = (who: World, role: 'office' | 'auditor') =>
+    who.as([role], (ctx) => readIntakeAgain(ctx, { intakeId }));
+  await expect(again(world, 'auditor')).rejects.toMatchObject({ code: 'not_allowed' });
+  const stranger = await makeWorld(base.db, base.owner);
+  await expect(again(stranger, 'office')).rejects.toMatchObject({ code: 'not_found' });
+  await assign(world, intakeId, batch.id);
+  await expect(again(world, 'office')).rejects.toMatchObject({ code: 'conflict' });
 });
 
 test('settled once: a second hand is told who did it, and nothing changes', async () => {

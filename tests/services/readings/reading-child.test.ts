@@ -1,3 +1,5 @@
+import { execFile } from 'node:child_process';
+import { promisify } from 'node:util';
 import { afterEach, expect, test } from 'vitest';
 
 import { recordOfSolution } from '@/db/seed/furnace-record';
@@ -44,6 +46,28 @@ test.each([
     expect(await reading.read(small())).toMatchObject({ content: { judged: { verdict: 'pass' } } });
   },
 );
+
+/** The reading processes that this test started, as the system lists them. */
+async function readingPids(): Promise<number[]> {
+  const { stdout } = await promisify(execFile)('ps', ['-o', 'pid=,args=', '--ppid', String(process.pid)]);
+  return stdout
+    .split('\n')
+    .filter((line) => line.includes('reading-process'))
+    .map((line) => Number.parseInt(line, 10));
+}
+
+test('a file at which the process dies says so, and the next is read all the same', async () => {
+  const { child: reading } = startChild({});
+  const broken = reading.read(huge());
+  for (const pid of await readingPids()) process.kill(pid, 'SIGKILL');
+  expect(await broken).toMatchObject({
+    fault: {
+      code: 'damaged',
+      message: 'This file broke the reading off. Read it by eye, or ask for it again.',
+    },
+  });
+  expect(await reading.read(small())).toMatchObject({ content: { judged: { verdict: 'pass' } } });
+});
 
 test('a file that cannot be read leaves the process to the next', async () => {
   const { child: reading } = startChild({});

@@ -1,39 +1,10 @@
 import { describe, expect, test } from 'vitest';
 
-import { StatedCertificate } from '@/lib/evidence/certificate/certificate';
+import type { StatedCertificate } from '@/lib/evidence/certificate/certificate';
 import { askedInFigures, type AskedInWords } from '@/lib/readings/asked-in-figures';
 import { propose } from '@/lib/readings/propose';
 
-const NOTHING = {
-  processor: null,
-  certificate_number: 'C-1',
-  certificate_date: '2026-06-17',
-  purchase_order: 'TP-1',
-  batch: null,
-  process: null,
-  specification: null,
-  specification_revision: null,
-  class_type: null,
-  alloy: null,
-  condition: null,
-  quench_medium: null,
-  quench_delay_s: null,
-  plating_end: null,
-  bake_start: null,
-  bake_end: null,
-  ndt: null,
-  sample_size: null,
-  furnace: null,
-  load: null,
-  signature_present: true,
-  signed_by: null,
-  signer_title: null,
-  conformance_statement: true,
-  lines: [],
-  cycles: [],
-  readings: [],
-  facts: [],
-};
+import { NOTHING_STATED } from './nothing-stated';
 
 type Cycle = StatedCertificate['cycles'][number];
 const solution = (given: Partial<Cycle>): Cycle => ({
@@ -54,7 +25,6 @@ interface Asked extends AskedInWords {
 function proposed(asked: readonly Asked[], stated: Partial<StatedCertificate>) {
   const { proposals } = propose(
     {
-      batchId: 'b',
       order: {
         batch: 'B-1',
         po: 'TP-1',
@@ -71,7 +41,15 @@ function proposed(asked: readonly Asked[], stated: Partial<StatedCertificate>) {
       })),
     },
     {
-      stated: StatedCertificate.parse({ ...NOTHING, ...stated }),
+      stated: {
+        ...NOTHING_STATED,
+        certificate_number: 'C-1',
+        certificate_date: '2026-06-17',
+        purchase_order: 'TP-1',
+        signature_present: true,
+        conformance_statement: true,
+        ...stated,
+      },
       file: { sha256: '', recognised: false, pages: [] },
       others: [],
       seen: [],

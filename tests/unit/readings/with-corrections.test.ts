@@ -1,7 +1,9 @@
 import { expect, test } from 'vitest';
 
-import { StatedCertificate } from '@/lib/evidence/certificate/certificate';
+import type { StatedCertificate } from '@/lib/evidence/certificate/certificate';
 import { hasField, withCorrection, withCorrections } from '@/lib/readings/with-corrections';
+
+import { NOTHING_STATED } from './nothing-stated';
 
 const fact = (field: string, value: string | number, confidence: number) => ({
   field,
@@ -12,36 +14,15 @@ const fact = (field: string, value: string | number, confidence: number) => ({
   confidence,
 });
 
-const STATED = StatedCertificate.parse({
-  processor: null,
+const STATED: StatedCertificate = {
+  ...NOTHING_STATED,
   certificate_number: '26-0O417',
-  certificate_date: null,
   purchase_order: 'TP-1',
-  batch: null,
-  process: null,
-  specification: null,
-  specification_revision: null,
-  class_type: null,
-  alloy: null,
-  condition: null,
   lines: [{ part_number: 'MC-1', rev: 'A', qty_accepted: 8, qty_rejected: null, material: null, lot: null }],
-  cycles: [],
-  quench_medium: null,
-  quench_delay_s: null,
-  plating_end: null,
-  bake_start: null,
-  bake_end: null,
   readings: [{ kind: 'hardness', unit: 'HRB', values: [58] }],
-  ndt: null,
-  sample_size: null,
-  furnace: null,
-  load: null,
-  signature_present: false,
-  signed_by: null,
-  signer_title: null,
   conformance_statement: true,
   facts: [fact('certificate_number', '26-0O417', 0.4), fact('lines[0].qty_accepted', 8, 0.9)],
-});
+};
 
 test.each([
   ['certificate_number', '26-00417', { certificate_number: '26-00417' }],
@@ -93,4 +74,13 @@ test('of two corrections of a field the later counts', () => {
 test('a field is one of the certificate’s own', () => {
   expect(hasField(STATED, 'lines[0].rev')).toBe(true);
   expect(hasField(STATED, 'toString')).toBe(false);
+});
+
+test('what the machine did not find is stated once a person says so, on the page of the certificate', () => {
+  const { signature_present, facts } = withCorrections(STATED, [
+    { field: 'signature_present', corrected: 'yes' },
+  ]);
+  expect(signature_present).toBe(true);
+  expect(facts.at(-1)).toMatchObject({ field: 'signature_present', value: 'yes', confidence: 1, page: 1 });
+  expect(facts.slice(0, -1)).toEqual(STATED.facts);
 });

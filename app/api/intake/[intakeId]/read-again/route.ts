@@ -1,0 +1,4 @@
+import { serve } from '@/app/_kit/serve';
+import { readIntakeAgainEndpoint } from '@/lib/readings/endpoints';
+
+export const POST = serve(readIntakeAgainEndpoint);

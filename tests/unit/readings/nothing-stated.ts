@@ -1,0 +1,33 @@
+import type { StatedCertificate } from '@/lib/evidence/certificate/certificate';
+
+/** A certificate on which nothing could be read. */
+export const NOTHING_STATED: StatedCertificate = {
+  processor: null,
+  certificate_number: null,
+  certificate_date: null,
+  purchase_order: null,
+  batch: null,
+  process: null,
+  specification: null,
+  specification_revision: null,
+  class_type: null,
+  alloy: null,
+  condition: null,
+  quench_medium: null,
+  quench_delay_s: null,
+  plating_end: null,
+  bake_start: null,
+  bake_end: null,
+  ndt: null,
+  sample_size: null,
+  furnace: null,
+  load: null,
+  signature_present: false,
+  signed_by: null,
+  signer_title: null,
+  conformance_statement: false,
+  lines: [],
+  cycles: [],
+  readings: [],
+  facts: [],
+};
