@@ -32,6 +32,8 @@ export interface HeadingReader<Heading> {
   readonly holds?: (headings: readonly (Heading | null)[]) => boolean;
   /** Whether a line of the page can be no row of a table: it begins with a label and its colon. */
   readonly endsTable: (segment: Segment) => boolean;
+  /** Whether a line can be a row under these headings; all are where it is not asked. */
+  readonly isRow?: (cells: readonly (Passage | null)[], headings: readonly (Heading | null)[]) => boolean;
   /** The column whose cells begin a row; a line without it continues the row above. */
   readonly anchors: (heading: Heading) => boolean;
 }
@@ -148,6 +150,11 @@ function tableUnder<Heading>(
     )
       break;
     const cells = cellsOf(line, columns);
+    if (rows.length > 0 && reader.isRow) {
+      const whole = cells.map((cell) => (cell.length === 0 ? null : joined(cell)));
+      const headings = columns.map(({ heading }) => heading);
+      if (!reader.isRow(whole, headings)) break;
+    }
     const last = rows[rows.length - 1];
     const begins = !last || (cells[anchor]?.length ?? 0) > 0 || line.box[1] - last.box[3] > 1.2 * line.height;
     if (!begins) {
@@ -188,6 +195,8 @@ function endsAt<Heading>(
   if (headingAt(lines, at, reader) !== null) return true;
   const [only, second, third] = line.segments;
   if (line.segments.some(({ text }) => SUM.test(text))) return true;
+  // A note under the table.
+  if (/^[*†‡]/.test(only?.text ?? '')) return true;
   // Nothing but labels: the next row of a form whose values stand below.
   if (line.segments.every(({ text }) => text.length > 2 && reader.read(text) !== null)) return true;
   // A label with its value under a table of more columns is a field of its own.
@@ -201,7 +210,8 @@ function endsAt<Heading>(
 }
 
 /** A row that adds up the others is the last, and none of them. */
-const SUM = /^(?:grand |sub-?)?(?:totals?|summe|gesamt|sum)\b\s*:?(?:\s*\d*)$/i;
+const SUM =
+  /^(?:grand |sub-?)?(?:totals?|summe|gesamt|sum|avg\.?|average|mean|mittelwert|moyenne|media)\s*:?(?:\s*\d*(?:[.,]\d+)?)$/i;
 
 /** The words of a line, each in the column it stands under. */
 function cellsOf(line: Line, columns: readonly Column<unknown>[]): Passage[][] {

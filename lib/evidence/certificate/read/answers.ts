@@ -125,12 +125,29 @@ function rowLabelled({ table, row, name, order, section }: RowPlace): Answer[] |
         order: order + turn,
         page: table.page,
         label: null,
-        row: name,
+        // Items side by side: each column is a line of the certificate.
+        row:
+          asks === places && ASKS_OF_LINES.has(label.key)
+            ? `${name.split('.').slice(0, 2).join('.')}.column${column}`
+            : name,
         marked: true,
       },
     ];
   });
 }
+
+const ASKS_OF_LINES: ReadonlySet<LabelKey> = new Set([
+  'part_number',
+  'revision',
+  'material',
+  'lot',
+  'heat',
+  'serial',
+  'quantity',
+  'quantity_accepted',
+  'quantity_rejected',
+  'quantity_received',
+]);
 
 function byColumn({ table, row, name, order, section }: RowPlace): Answer[] {
   const namedBy = row.cells.find(

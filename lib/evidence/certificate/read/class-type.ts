@@ -5,7 +5,7 @@ import { wordsIn } from './codes';
 import type { Paper } from './paper';
 
 const ROMAN = String.raw`(?:[IVXl1|]{1,4}[A-C]?|\d{1,2}[A-C]?|[A-D])(?![\p{L}\d])`;
-const KIND = String.raw`(?:type|SC|class|method|grade|form|ty\.|cl\.|sensitivity(?:\s+level)?|level|typ|klasse|classe|tipo|clase|m[eé]thode|methode)`;
+const KIND = String.raw`(?:type|SC|class|method|grade|form|ty\.?|cl\.?|gr\.?|sensitivity(?:\s+level)?|level|typ|klasse|classe|tipo|clase|m[eé]thode|methode)`;
 const DESIGNATION = new RegExp(
   String.raw`(?<![\p{L}])${KIND}\.?\s*:?\s*${ROMAN}(?:\s*(?:[,;/&]|and|-)?\s*${KIND}\.?\s*:?\s*${ROMAN})*`,
   'giu',
@@ -100,6 +100,7 @@ const ENGLISH: Readonly<Record<string, string>> = {
   classe: 'Class',
   clase: 'Class',
   cl: 'Class',
+  gr: 'Grade',
   methode: 'Method',
   méthode: 'Method',
 };

@@ -15,7 +15,7 @@ export interface CycleAttributes {
 const LIMIT_AFTER =
   /^\s*(?:\(?\s*)(?:min(?:imum)?|max(?:imum)?|required|req'?d|or (?:more|less|longer)|nominal)\b(?!\s*[.:]?\s*\d)/i;
 const LIMIT_BEFORE =
-  /(?:min(?:imum|\.)?(?: of)?|max(?:imum|\.)?(?: of)?|at least|not (?:less|more|exceeding|to exceed)(?: than)?|no (?:less|more) than|required|req'?d|≥|≤|>=|<=|<|>|limit|up to|within|allowed|spec(?:ified)?)\s*:?\s*$/i;
+  /(?:min(?:imum|\.)?(?: of)?|max(?:imum|\.)?(?: of)?|at least|not (?:less|more|exceeding|to exceed)(?: than)?|no (?:less|more) than|required|req'?d|≥|≤|>=|<=|<|>|limit|up to|within|allowed|spec(?:ified)?)\s*:?\s*$|\d\s*(?:°\s?[FC]|hrs?|hours?|min|h)?\s?[-–]\s?$/i;
 
 export const isLimit = (
   text: string,

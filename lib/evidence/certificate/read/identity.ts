@@ -27,11 +27,11 @@ export const CERTIFICATE_NUMBER: CodeField = {
       'giu',
     ),
     new RegExp(
-      String.raw`\b(?:certificate|certification|certificat|report|zeugnis)\b[^.:;\d]{0,50}\bno\.?\s*:?\s*${CODE}`,
+      String.raw`\b(?:certificate|certification|certificat|cert|report|zeugnis)\b[^.:;\d]{0,50}\bno\.?\s*:?\s*${CODE}`,
       'giu',
     ),
     new RegExp(
-      String.raw`\b(?:certificate|certification|cert|coc)\.?\s+((?=[A-Z0-9./-]*\d)[A-Z]{1,5}-?[A-Z0-9./-]+|\d{2}-\d{3,}|\d{4,})`,
+      String.raw`\b(?:certificate|certification|cert|coc|certificate of (?:conformance|conformity|compliance|processing|treatment|heat treatment|analysis)|report)\.?\s+(?:[-–]\s+)?((?=[A-Z0-9./-]*\d)[A-Z]{1,5}-?[A-Z0-9./-]+|\d{2}-\d{3,}|\d{4,})`,
       'giu',
     ),
   ],
@@ -55,6 +55,8 @@ export const BATCH: CodeField = {
       String.raw`\b(?:(?:your|customer)\s+)?batch\s*(?:no\.?|nr\.?|number|#)?\s*:?\s*${CODE}`,
       'giu',
     ),
+    // As the orders of this product number them.
+    /(?<![\p{L}\d-])(B-\d{4})(?![\p{L}\d-])/gu,
   ],
 };
 

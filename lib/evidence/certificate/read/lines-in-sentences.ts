@@ -7,7 +7,7 @@ import type { Paper } from './paper';
 const SENTENCE_TRUST = 0.8;
 
 const PART =
-  /\b(?:p\/?n\.?|part\s*(?:numbers?|no\.?|nos\.?|#)|parts?|drawing|dwg\.?|teile?-?(?:nr\.?|nummer)|r[eé]f(?:[eé]rence)?\.?)\s*:?\s*(?=[A-Z0-9./-]*\d)/giu;
+  /\b(?:p\/?n\.?|part\s*(?:numbers?|no\.?|nos\.?|#)|parts?|articles?|components?|items?(?=:)|drawing|dwg\.?|teile?-?(?:nr\.?|nummer)|r[eé]f(?:[eé]rence)?\.?)\s*:?\s*(?=[A-Z0-9./-]*\d)/giu;
 const COUNTS = {
   accepted: [
     /(?<![\p{L}\d.,/-])(\d{1,3}(?:,\d{3})+|\d+)\s*(?:\(\w+\)\s*)?(?:pcs?\.?|pieces?|parts?|ea\.?|units?)?\s*(?:were\s+|was\s+|are\s+|have been\s+)?(?:found\s+)?(?:accepted|acceptable|conforming|passed|good|acc\.|angenommen|accept[eé]es?|aceptadas?)/iu,
@@ -66,10 +66,15 @@ function linesIn(passage: Passage, paper: Paper): ReadLine[] {
       /\blot\s*(?:no\.?|number|#|code)?\s*:?\s*((?=[A-Z0-9./-]*\d)[A-Z0-9][A-Z0-9./-]*[A-Z0-9]|\d+)/iu,
     );
     if (lot) line.lot = { ...lot, trust };
-    const material = said(
-      around,
-      /\b(?:material|matl\.?|made (?:of|from)|werkstoff|mati[eè]re)\s*:?\s*([A-Z0-9][^,;:()]{2,40}?)(?=\s*(?:[,;:()]|\.\s|\.?$|\blot\b|\bqty\b|\bheat\b|\d+\s*pcs))/iu,
-    );
+    const material =
+      said(
+        around,
+        /\b(?:lot|heat)\s*(?:no\.?|number|#)?\s*:?\s*(?=[A-Z0-9./-]*\d)[A-Z0-9./-]+\s+of\s+([A-Z0-9][^,;:()]{2,40}?)(?=\s*(?:[,;:()]|\.\s|\.?$))/iu,
+      ) ??
+      said(
+        around,
+        /\b(?:material|matl\.?|made (?:of|from)|werkstoff|mati[eè]re)\s*:?\s*([A-Z0-9][^,;:()]{2,40}?)(?=\s*(?:[,;:()]|\.\s|\.?$|\blot\b|\bqty\b|\bheat\b|\d+\s*pcs))/iu,
+      );
     if (material && /\d/.test(material.value)) line.material = { ...material, trust: 0.7 };
     return [line];
   });

@@ -1,7 +1,7 @@
 import { findSpecifications } from '../../../trade/lineage/recognise-specification';
 import { boxAround } from '../../layout/box';
 import { passageFrom, spotIn, type Passage, type Spot } from '../../layout/passage';
-import { TRUST, widestFirst } from './answers';
+import { TRUST, widestFirst, type Answer } from './answers';
 import { daysIn } from './dates';
 import type { LabelKey } from './labels';
 import type { Paper } from './paper';
@@ -98,8 +98,8 @@ const isKind = (key: LabelKey): key is ReadingKind & LabelKey => (KINDS as strin
 export function readReadings(paper: Paper): ReadReading[] {
   const asked: (ReadReading & { readonly group: string })[] = [];
   for (const answer of paper.answers) {
-    if (!isKind(answer.key) || answer.also.includes('requirement')) continue;
-    const kind = answer.key;
+    const kind = kindAsked(answer);
+    if (kind === null || answer.also.includes('requirement')) continue;
     const values = widestFirst(answer);
     for (const { passage, how } of values) {
       const found = valuesIn(passage, kind, `${answer.qualifier} ${answer.words}`, paper.decimal);
@@ -112,6 +112,17 @@ export function readReadings(paper: Paper): ReadReading[] {
   const kinds = new Set(asked.map(({ kind }) => kind));
   const said = paper.paragraphs.flatMap((paragraph) => inSentences(paragraph, paper, kinds));
   return merged([...asked, ...said]);
+}
+
+/** What the label asks for; a column of results says it by its unit alone. */
+function kindAsked({ key, qualifier }: Answer): ReadingKind | null {
+  if (isKind(key)) return key;
+  if (key !== 'result') return null;
+  return (
+    (['hardness', 'conductivity', 'thickness'] as const).find((kind) =>
+      UNITS[kind].some(({ name, pattern }) => name !== 'in' && name !== 'mm' && pattern.test(qualifier)),
+    ) ?? null
+  );
 }
 
 /** Readings of one kind and unit are one series: rows of a table, places of a form. The same series twice is once. */
@@ -154,6 +165,15 @@ const LIMITS: readonly RegExp[] = [
   /\d+\s*(?:readings?|places?|pcs?|pieces?|samples?|specimens?|tests?|kgf?|kg|gf|g|kHz|measurements?|locations?|parts?)\b/giu,
 ];
 
+/** Only inches are written so, with nothing before the point. */
+const IN_INCHES = /(?<![\d.])\.00\d/;
+
+const STATISTICS: readonly RegExp[] = [
+  /\bmin(?:imum)?\.?\s*[:=]?\s*\d*\.?\d/iu,
+  /\bmax(?:imum)?\.?\s*[:=]?\s*\d*\.?\d/iu,
+  /\b(?:avg|average|mean|mittel\w*|moy(?:enne)?|ø)\.?\s*[:=]?\s*\d*\.?\d/iu,
+];
+
 function valuesIn(
   passage: Passage,
   kind: ReadingKind,
@@ -164,7 +184,10 @@ function valuesIn(
   const unit =
     UNITS[kind].find(({ pattern }) => pattern.test(text)) ??
     UNITS[kind].find(({ pattern }) => pattern.test(about)) ??
-    UNITS[kind].find(({ pattern }) => pattern.test(passage.text));
+    UNITS[kind].find(({ pattern }) => pattern.test(passage.text)) ??
+    (kind === 'thickness' && IN_INCHES.test(text)
+      ? UNITS.thickness.find(({ name }) => name === 'in')
+      : undefined);
   const figures = new RegExp(
     sign === ','
       ? String.raw`(?<![\p{L}\d.,])\d+(?:[.,]\d+)?`
@@ -205,6 +228,10 @@ function withoutLimits(text: string, kind: ReadingKind): string {
   for (const { start, end } of daysIn(plain)) blank(start, end);
   if (kind !== 'hardness')
     for (const match of plain.matchAll(/HR[A-Z0-9]{1,3}\s?\d+(?:[.,]\d+)?/g))
+      blank(match.index, match.index + match[0].length);
+  // Least, most and mean together are what was measured, without the mean.
+  if (STATISTICS.every((pattern) => pattern.test(plain)))
+    for (const match of plain.matchAll(/\b(?:min|max)(?:imum)?\.?\s*[:=]?\s*(?=[\d.])/giu))
       blank(match.index, match.index + match[0].length);
   for (const pattern of LIMITS) {
     for (const match of plain.matchAll(pattern)) blank(match.index, match.index + match[0].length);

@@ -130,7 +130,13 @@ function valuesOf(where: Place): AskedValue[] {
   if (below) {
     const value: AskedValue = { passage: below, how: 'below' };
     // Without a colon a label looks down first where its neighbour is no value but stands in another column's row.
-    if (next && !label.marked && startsLevel(segment, below) && !closeBy(segment, next))
+    if (
+      next &&
+      !label.marked &&
+      startsLevel(segment, below) &&
+      !closeBy(segment, next) &&
+      !(/\d/.test(next.text) && !/\d/.test(below.text))
+    )
       values.unshift(value);
     else values.push(value);
   }
@@ -142,11 +148,17 @@ const startsLevel = ({ box }: Segment, below: Segment): boolean =>
 
 const closeBy = ({ box }: Segment, next: Segment): boolean => next.box[0] - box[2] < 4 * heightOf(box);
 
+/** A label and a figure for it in one place; least and most belong to the readings before them. */
+const saysValue = ({ start, end, words }: FoundLabel, text: string): boolean =>
+  start < 4 && !/^(?:min|max)/.test(words) && /\d/.test(text.slice(end));
+
 /** What follows on the line, up to the next label. */
-function toTheRight({ labelled, index, place }: Place): Segment[] {
+function toTheRight({ label, labelled, index, place }: Place): Segment[] {
   const following: Segment[] = [];
-  for (const { segment, isLabel } of (labelled[index] ?? []).slice(place + 1)) {
-    if (isLabel) break;
+  for (const { segment, labels, isLabel } of (labelled[index] ?? []).slice(place + 1)) {
+    // A label with its value in one place, without a colon: "Delay 7 s".
+    const [first] = labels;
+    if (isLabel || (first && first.key !== label.key && saysValue(first, segment.text))) break;
     if (/[\p{L}\p{N}]/u.test(segment.text)) following.push(segment);
   }
   return following;
@@ -241,6 +253,10 @@ function runsOn(last: Line, line: Line): boolean {
   const prose = last.segments.length <= 2 && words >= 5;
   const [first] = line.segments;
   const label = first ? labelAtStart(first.text) : null;
+  const before = labelAtStart(last.segments[0]?.text ?? '');
+  // Items of a list, each with the same label before it.
+  if (label && before && label.words === before.words && label.key === before.key) return false;
+  if (line.segments.length > 2) return false;
   const listed = /^\s*(?:[-–•*·]|\d{1,2}[.)])\s/.test(first?.text ?? '');
   return (
     close &&

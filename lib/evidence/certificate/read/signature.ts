@@ -14,7 +14,7 @@ export interface ReadSignature {
 }
 
 const SIGNED_IN_WORDS =
-  /(?:^|\s)\/\s?s\s?\/|(?:^|\s)gez\.\s+\p{Lu}|(?:electronically|digitally|elektronisch|num[eé]riquement)\s+(?:signed|approved|authenticated|certified|unterzeichnet|unterschrieben|sign[eé]e?)|\be-?signed\b|(?:signed|approved|signature)\s+(?:electronically|digitally)|electronic signature\s*(?:of|by|:)\s*\p{L}/iu;
+  /(?:^|\s)\/\s?s\s?\/|(?:^|\s)gez\.\s+\p{Lu}|(?:electronically|digitally|elektronisch|num[eé]riquement)\s+(?:signed|approved|authenticated|certified|authorized|authorised|released|unterzeichnet|unterschrieben|sign[eé]e?)|\be-?signed\b|(?:signed|approved|signature|released|authorized|authorised)\s+(?:electronically|digitally)|sign[eé]e?\s+(?:[eé]lectroniquement|num[eé]riquement)|firmado\s+(?:electr[oó]nicamente|digitalmente)|firmato\s+digitalmente|(?:elektronisch|digital(?:t)?)\s+(?:freigegeben|ondertekend|signert|signeret|signerad)|(?:electronic|digital|e-?)\s*signature\s*(?:of|by|:|-)\s*\p{L}|signature on file|\((?:electronic(?:ally)?|digital|e-?)\s*sign(?:ature|ed)\)|\(signed\)|(?:signert|signeret|signerad|ondertekend)\s+(?:elektronisk|digitalt|elektronisch|digitaal)/iu;
 const UNSIGNED =
   /not\s+(?:electronically\s+)?signed|signature not required|valid without (?:a )?signature|ohne unterschrift g[uü]ltig/iu;
 
