@@ -1,5 +1,5 @@
 import { passageFrom, type Passage } from '../../layout/passage';
-import { countIn, partIn, readingAt, type Reading } from './codes';
+import { annealed, countIn, partIn, readingAt, type Reading } from './codes';
 import { beginsWithDay } from './identity';
 import type { ReadLine } from './lines';
 import type { Paper } from './paper';
@@ -75,7 +75,8 @@ function linesIn(passage: Passage, paper: Paper): ReadLine[] {
         around,
         /\b(?:material|matl\.?|made (?:of|from)|werkstoff|mati[eè]re)\s*:?\s*([A-Z0-9][^,;:()]{2,40}?)(?=\s*(?:[,;:()]|\.\s|\.?$|\blot\b|\bqty\b|\bheat\b|\d+\s*pcs))/iu,
       );
-    if (material && /\d/.test(material.value)) line.material = { ...material, trust: 0.7 };
+    if (material && /\d/.test(material.value))
+      line.material = { ...material, value: annealed(material.value), trust: 0.7 };
     return [line];
   });
 }

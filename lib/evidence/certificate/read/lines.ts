@@ -1,5 +1,5 @@
 import { TRUST, type Answer, type AnswerValue } from './answers';
-import { countIn, partIn, readingAt, revisionIn, wordsIn, codeIn, type Reading } from './codes';
+import { annealed, countIn, partIn, readingAt, revisionIn, wordsIn, codeIn, type Reading } from './codes';
 import { beginsWithDay } from './identity';
 import type { LabelKey } from './labels';
 import type { Paper } from './paper';
@@ -72,9 +72,6 @@ const WRITERS: Partial<Record<LabelKey, Writer>> = {
     return serials.length > 0;
   },
 };
-
-/** No temper is nought: 2024-0 is 2024-O. */
-const annealed = (material: string): string => material.replace(/(?<![\d-])([1-8]\d{3})-0(?![\d.])/g, '$1-O');
 
 function counted(field: 'quantity' | 'accepted' | 'rejected' | 'received'): Writer {
   return (line, value, paper) => {

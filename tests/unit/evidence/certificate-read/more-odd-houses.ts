@@ -397,7 +397,7 @@ batch: B-0512
 process: fluorescent_penetrant
 specification: ASTM E1417
 specification_revision: 21
-class_type: I / C / 3
+class_type: Type I Method C Level 3
 quench_delay_s: null
 plating_end: null
 bake_start: null

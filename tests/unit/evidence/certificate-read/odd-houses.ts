@@ -85,7 +85,7 @@ batch: B-0107
 process: solution_heat_treat_and_age
 specification: AMS 2770
 specification_revision: R
-class_type: null
+class_type: 6061-O to 6061-T62
 quench_delay_s: 6
 plating_end: null
 bake_start: null
@@ -128,7 +128,7 @@ batch: B-0311
 process: fluorescent_penetrant
 specification: ASTM E1417
 specification_revision: 21e1
-class_type: Type I
+class_type: Type I Method C Level 3
 quench_delay_s: null
 plating_end: null
 bake_start: null
