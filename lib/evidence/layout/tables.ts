@@ -34,6 +34,8 @@ export interface HeadingReader<Heading> {
   readonly endsTable: (segment: Segment) => boolean;
   /** Whether a line can be a row under these headings; all are where it is not asked. */
   readonly isRow?: (cells: readonly (Passage | null)[], headings: readonly (Heading | null)[]) => boolean;
+  /** Whether a cell of that column begins a row; without it all do. */
+  readonly begins?: (cell: string, heading: Heading) => boolean;
   /** The column whose cells begin a row; a line without it continues the row above. */
   readonly anchors: (heading: Heading) => boolean;
 }
@@ -78,7 +80,11 @@ function headingAt<Heading>(
       )
     )
       break;
-    const columns = columnsOf(used).map((column) => ({ ...column, heading: reader.read(column.text) }));
+    const columns = columnsOf(used).map(({ text, box, parts }) => ({
+      text,
+      box,
+      heading: reader.read(text) ?? (parts.length > 1 ? (readAny(parts, reader) ?? null) : null),
+    }));
     const known = columns.filter(({ heading }) => heading !== null).length;
     if (
       known < 2 ||
@@ -93,6 +99,15 @@ function headingAt<Heading>(
     if (!best || known > best.known || (known === best.known && isPart)) best = { columns, height, known };
   }
   return best;
+}
+
+/** Of a heading over several lines that says nothing as a whole, what its last line says, or one above. */
+function readAny<Heading>(parts: readonly string[], { read }: HeadingReader<Heading>): Heading | null {
+  for (const part of [...parts].reverse()) {
+    const heading = read(part);
+    if (heading !== null) return heading;
+  }
+  return null;
 }
 
 const isUnderHeading = ({ box }: Segment, columns: readonly Column<unknown>[]): boolean =>
@@ -114,7 +129,7 @@ function withRowHeads<Heading>(
 }
 
 /** Segments that stand above one another are one cell of the heading. */
-function columnsOf(lines: readonly Line[]): { text: string; box: Box }[] {
+function columnsOf(lines: readonly Line[]): { text: string; box: Box; parts: string[] }[] {
   const cells: { parts: Segment[]; box: Box }[] = [];
   for (const segment of lines.flatMap(({ segments }) => segments)) {
     const cell = cells.find(({ box }) => sharedAcross(box, segment.box) > 0);
@@ -125,7 +140,10 @@ function columnsOf(lines: readonly Line[]): { text: string; box: Box }[] {
   }
   return cells
     .sort((a, b) => a.box[0] - b.box[0])
-    .map(({ parts, box }) => ({ text: parts.map(({ text }) => text).join(' '), box }));
+    .map(({ parts, box }) => {
+      const texts = parts.map(({ text }) => text);
+      return { text: texts.join(' '), box, parts: texts };
+    });
 }
 
 function tableUnder<Heading>(
@@ -156,7 +174,10 @@ function tableUnder<Heading>(
       if (!reader.isRow(whole, headings)) break;
     }
     const last = rows[rows.length - 1];
-    const begins = !last || (cells[anchor]?.length ?? 0) > 0 || line.box[1] - last.box[3] > 1.2 * line.height;
+    const begins =
+      !last ||
+      beginsRow(cells[anchor] ?? [], columns[anchor]?.heading, reader) ||
+      line.box[1] - last.box[3] > 1.2 * line.height;
     if (!begins) {
       cells.forEach((cell, index) => last.cells[index]?.push(...cell));
       last.box = boxAround([last.box, line.box]);
@@ -173,6 +194,15 @@ function tableUnder<Heading>(
       cells: cells.map((cell) => (cell.length === 0 ? null : joined(cell))),
     })),
   };
+}
+
+function beginsRow<Heading>(
+  cell: readonly Passage[],
+  heading: Heading | null | undefined,
+  reader: HeadingReader<Heading>,
+): boolean {
+  if (cell.length === 0) return false;
+  return !heading || !reader.begins || reader.begins(joined(cell).text, heading);
 }
 
 /** Further below the line above than rows of this table are from one another. */

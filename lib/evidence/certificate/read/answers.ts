@@ -23,6 +23,8 @@ export interface Answer {
   /** Row of a table, the same for all answers from it. */
   readonly row: string | null;
   readonly marked: boolean;
+  /** Of a registration of the house, as at the foot of a form: it says nothing of this work. */
+  readonly registered?: true;
 }
 
 export interface AnswerValue {
@@ -43,7 +45,8 @@ export const TRUST: Readonly<Record<AnswerValue['how'], number>> = {
 export function answersOf(sheets: readonly Sheet[]): Answer[] {
   return sheets
     .flatMap((sheet) => [
-      ...sheet.asked.map(({ label, spot, section, values, order }): Answer => ({
+      ...sheet.asked.map(({ label, spot, section, values, order, before }): Answer => ({
+        ...(REGISTERED.test(before) && { registered: true as const }),
         key: label.key,
         words: label.words,
         also: label.also,
@@ -63,6 +66,9 @@ export function answersOf(sheets: readonly Sheet[]): Answer[] {
     ])
     .sort((a, b) => a.order - b.order);
 }
+
+const REGISTERED =
+  /\b(?:AS\s?9\d{3}|EN\s?9\d{3}|ISO|nadcap|regist\w+|accredit\w+|A2LA|approv\w+ to|FAA|EASA|repair station|cage)\b/i;
 
 type LabelTable = Table<FoundLabel>;
 

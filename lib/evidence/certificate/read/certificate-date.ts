@@ -102,7 +102,7 @@ function dayAlone(paper: Paper, segment: Passage, down: number): Candidate<strin
 
 /** "Certificat N° 26-118 du", "Zeugnis Nr. 4711 vom". */
 const NUMBERED_AND_DATED =
-  /\b(?:certificat\w*|cert|zeugnis\w*|bescheinigung\w*|report|certificado|certificato)\b(?:(?!order|\bp\.?o\b)[^;]){0,50}(?:\b(?:du|vom|dtd|dated|of|del|de fecha)|\d\S*\s*[-–,·|])\s*$/i;
+  /\b(?:certificat\w*|cert|zeugnis\w*|bescheinigung\w*|report|certificado|certificato)\b(?:(?!order|\bp\.?o\b)[^;]){0,50}(?:\b(?:du|vom|dtd|dated|issued(?: on)?|of|del|de fecha)|\d\S*\s*[-–,·|/])\s*$/i;
 
 /** The segment is what another label than a plain date asks for. */
 function coversOther(answer: Answer, segment: Passage): boolean {

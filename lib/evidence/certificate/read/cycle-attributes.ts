@@ -55,8 +55,9 @@ export function cycleAttributesIn(
     return moment && spot ? { moment, spot } : null;
   };
   const start = asked !== null && END_KEYS.has(asked) ? null : at(first && withDayNearby(first, moments));
+  const isEnd = first && second && GOES_ON_TO.test(text.slice(first.end, second.start));
   const endOfBoth =
-    second && (asked === null || !START_KEYS.has(asked)) ? at(withDayNearby(second, moments)) : null;
+    second && (asked === null || !START_KEYS.has(asked) || isEnd) ? at(withDayNearby(second, moments)) : null;
   const end = asked !== null && END_KEYS.has(asked) ? at(first) : endOfBoth;
   const paired = asked !== null || end !== null ? start : null;
   return {
@@ -66,6 +67,10 @@ export function cycleAttributesIn(
     ...(end && { end }),
   };
 }
+
+/** Between a start and its end: "to", "quenched", a dash. */
+const GOES_ON_TO =
+  /^[\s,;]*(?:-|–|—|to|until|till|thru|through|bis|[àa]|hasta|out|off|ended|end|finish\w*|quench\w*|discharg\w*|remov\w*|unload\w*)(?![\p{L}])/iu;
 
 /** The time before which the plating ended is none of the bake's. */
 const PLATED_THEN = /\bplat(?:ing|ed)\b[^,;.]{0,24}$/i;

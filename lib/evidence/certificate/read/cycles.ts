@@ -49,6 +49,7 @@ const CYCLE_KEYS: ReadonlySet<LabelKey> = new Set([
   'process',
   'condition',
   'quench_medium',
+  'result',
 ]);
 const LOADING = /load|charge/;
 const BAKE_KEYS: ReadonlySet<LabelKey> = new Set(['bake', 'bake_start', 'bake_end']);
@@ -112,6 +113,8 @@ const textOf = ({ values }: Answer): string => values[0]?.passage.text ?? '';
 
 function stepOf(answer: Answer, process: Process | null): Step | null {
   if (BAKE_KEYS.has(answer.key)) return /stress/.test(answer.words) ? 'stress_relief' : bakeStep(process);
+  // "Achieved 900 °F for 44 min" in a step's part of the form.
+  if (answer.key === 'result') return answer.row === null ? (answer.step ?? answer.section) : null;
   if (answer.key === 'process' || answer.key === 'condition' || answer.key === 'quench_medium') {
     const named = answer.step ?? stepsIn(answer.words)[0]?.step ?? null;
     return answer.key === 'quench_medium' ? null : named;

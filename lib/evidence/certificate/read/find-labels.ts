@@ -29,12 +29,29 @@ interface Phrase {
 }
 
 const WORDS: Readonly<Record<string, string>> = {
-  no: String.raw`(?:n\.?[°ºo]s?|nr|num|numbers?|nbr|numero|nummer|#)`,
+  QTY: String.raw`(?:qty|q['’ ]?ty|quantity|quant|pcs|pc s|pieces|parts|units|no of (?:pcs|pieces|parts)|total|q[. ]?ta|quantita)`,
+  ACC: "acc(?:ept(?:ed|able)?|ettat[aei]|[ '’]?d)?|good|ok(?:ay)?|pass(?:ed)?|conform(?:ing|ed)",
+  REJ: "rej(?:ect(?:ed|s)?|[ '’]?d)?|scartat[aei]|scrap(?:ped)?|fail(?:ed)?|non[ -]?conform(?:ing)?|nok|discrepant|defective|bad",
+  REC: "rec(?:eived|[ '’]?d)|rcvd|rcd|submitted|presented|ordered|in",
+  OUT: 'ship(?:ped)?|shpd|out|d[ei]spatched|d[ei]sp|delivered|returned|processed|treated|certified|released',
+  COND: 'condition|cond|temper',
+  no: String.raw`(?:n\.?[°ºo]s?|n(?=\.\s?:?\s*[^\s.])|nr|num|numbers?|nbr|numero|nummer|#)`,
   cert: String.raw`cert(?:ificate|ification|ificat|if)?`,
   spec: String.raw`spec(?:ification|s)?`,
   temp: String.raw`temp`,
   '%': '%',
   '&': '&',
+};
+
+/** With what the words of a group may begin. */
+const FIRST: Readonly<Record<string, readonly string[]>> = {
+  no: ['n', '#'],
+  QTY: ['q', 'p', 'u', 'n', 't'],
+  ACC: ['a', 'g', 'o', 'p', 'c'],
+  REJ: ['r', 's', 'f', 'n', 'd', 'b'],
+  REC: ['r', 's', 'p', 'o', 'i'],
+  OUT: ['s', 'o', 'd', 'r', 'p', 't', 'c'],
+  COND: ['c', 't'],
 };
 
 const BETWEEN = String.raw`[\s./_\-]{0,3}`;
@@ -43,7 +60,9 @@ function patternOf(words: readonly string[]): RegExp {
   const parts = words.map((word, index) => {
     const may = word.endsWith('?');
     const plain = may ? word.slice(0, -1) : word;
-    const said = WORDS[plain] ?? folded(plain);
+    // As folded texts have it: no l.
+    const group = /^[A-Z]+$/.test(plain) ? `(?:${(WORDS[plain] ?? '').replace(/l/g, 'i')})` : WORDS[plain];
+    const said = group ?? folded(plain);
     const before = index === 0 ? '' : BETWEEN;
     return may ? `(?:${before}${said})?` : `${before}${said}`;
   });
@@ -69,7 +88,7 @@ function indexed(): Map<string, Phrase[]> {
       numbered: words.some((word) => word === 'no' || word === 'no?'),
     };
     const letter = folded(words[0] ?? '').charAt(0);
-    const first = words[0]?.replace('?', '') === 'no' ? ['n', '#'] : [letter];
+    const first = FIRST[words[0]?.replace('?', '') ?? ''] ?? [letter];
     for (const sign of first) byLetter.set(sign, [...(byLetter.get(sign) ?? []), entry]);
   }
   return byLetter;
@@ -135,7 +154,7 @@ function labelAt(text: string, plain: string, at: number, first: boolean): Found
   if (glued && !text.slice(at, best.end).endsWith('#') && !asksTwice(text, plain, best.end)) return null;
   const asked = apart(best.phrase.key, plain.slice(at, best.end));
   const tail = tailOf(text, plain, best.end, asked.key);
-  if (best.phrase.needsColon && !/[:]/.test(text.slice(best.end, tail.end))) return null;
+  if (best.phrase.needsColon && !/[:=…]|\.{2}/.test(text.slice(best.end, tail.end))) return null;
   const standsOut =
     first || tail.marked || (best.phrase.numbered && /[#.]\s*$|no|num/.test(plain.slice(at, best.end)));
   if (!standsOut) return null;
@@ -171,7 +190,11 @@ function phraseAt(plain: string, at: number): { phrase: Phrase; end: number } | 
     const match = phrase.pattern.exec(plain);
     if (!match) continue;
     const end = at + match[0].length;
-    if (phrase.needsColon && !/^[.\s]*(?:[([][^)\]]{0,40}[)\]]\s*)?[:/]/.test(plain.slice(end))) continue;
+    if (
+      phrase.needsColon &&
+      !/^\s*(?:[:/=]|\.{2,}|…|\.?\s*(?:[([][^)\]]{0,40}[)\]]\s*)?[:/])/.test(plain.slice(end))
+    )
+      continue;
     if (!best || end > best.end) best = { phrase, end };
   }
   return best;
@@ -255,7 +278,7 @@ function secondLabel(
   plain: string,
   from: number,
 ): { key: LabelKey | null; end: number } | null {
-  const bridge = /^\s*(?:[/|&+]|and\b|et\b|und\b|[-–](?=\s))\s*/i.exec(text.slice(from));
+  const bridge = /^\s*(?:[/|&+,]|and\b|or\b|et\b|ou\b|und\b|oder\b|[-–](?=\s))\s*/i.exec(text.slice(from));
   if (!bridge) return furtherWords(text, plain, from);
   const at = from + bridge[0].length;
   const found = phraseAt(plain, at);

@@ -73,6 +73,7 @@ export function codesFor(paper: Paper, field: CodeField): Candidate<string>[] {
 }
 
 function fromAnswer(answer: Answer, field: CodeField): Candidate<string>[] {
+  if (answer.registered) return [];
   const turn = [answer.key, ...answer.also].findIndex((key) => field.keys.includes(key));
   if (turn < 0) return [];
   const found = fitting(answer, (passage) => readCode(passage));
@@ -83,12 +84,15 @@ function fromAnswer(answer: Answer, field: CodeField): Candidate<string>[] {
   const far = found.how === 'right' || found.how === 'below' ? 0.98 : 1;
   return [
     {
-      value: value.replace(/^P(?:0O|O0|0)(?=-?\d)/, 'PO'),
+      value: lettersOfOrder(value),
       spot: found.spot,
       trust: found.trust * far * (answer.marked ? 1 : 0.97),
     },
   ];
 }
+
+/** No order begins with P0. */
+const lettersOfOrder = (code: string): string => code.replace(/^P(?:0O|O0|0)(?=-?\d)/, 'PO');
 
 const readCode = (passage: Passage): Reading<string> | null => codeIn(passage, beginsWithDay);
 
@@ -98,7 +102,7 @@ function inSentence(passage: Passage, pattern: RegExp): Candidate<string>[] {
     const start = match.index + match[0].lastIndexOf(match[1] ?? '');
     if (!/\d/.test(value) || beginsWithDay(passage.text.slice(start))) return [];
     const found = readingAt(passage, start, start + value.length, value);
-    return found ? [{ ...found, trust: 0.7 }] : [];
+    return found ? [{ ...found, value: lettersOfOrder(found.value), trust: 0.7 }] : [];
   });
 }
 

@@ -21,6 +21,8 @@ export function labelledTables(lines: readonly Line[]): Table<FoundLabel>[] {
         cells,
         headings.map((heading) => heading?.key ?? null),
       ),
+    // A part's name under its number.
+    begins: (cell, { key }) => key !== 'part_number' || /\d/.test(cell),
     anchors: ({ key }) => key === 'part_number',
   }).map(withPartColumn);
 }
@@ -36,7 +38,10 @@ function isRowOfParts(cells: readonly (Passage | null)[], keys: readonly (LabelK
   if (at <= 1 && (stepsIn(first)[0]?.start === 0 || (label !== null && !label.whole))) return false;
   const counts = cells.filter((_, index) => COUNTS.has(keys[index] ?? 'remarks'));
   const part = cells[at]?.text ?? null;
-  if (part !== null && !/\d/.test(part)) return false;
+  const alone = cells.filter((cell) => cell !== null).length === 1;
+  // A part's name in a line under its number.
+  if (part !== null && !/\d/.test(part))
+    return alone && part.length < 30 && label === null && stepsIn(part).length === 0;
   return part === null || counts.every((cell) => cell === null || /\d|^[-–]+$|none|nil/i.test(cell.text));
 }
 

@@ -10,7 +10,7 @@ import { durationsIn, numberFrom } from './quantities';
 import { localMinute, workDaysOf } from './work-days';
 
 const PLATED =
-  /\b(?:plating|plate|plt\.?|platt\w*|cadmiage|zingage|beschichtung|d[eé]p[oô]t)\s+(?:was\s+)?(?:\w+\s+)?(?:compl\w*\.?|finish\w*|end\w*|stopp?\w*|out|termin\w*|beendet)|out of (?:the\s+)?plating(?:\s+(?:tank|bath|line|solution))?|removed from (?:the\s+)?(?:plating|tank|bath)(?:\s+(?:tank|bath|line|solution))?|left (?:the\s+)?plating(?:\s+(?:tank|bath|line|solution))?|plated (?:at|on|:)|(?:cadmium|zinc)\s+plated/iu;
+  /\b(?:plating|plate|plt\.?|platt\w*|cadmiage|zingage|beschichtung|d[eé]p[oô]t)\s+(?:was\s+)?(?:\w+\s+)?(?:compl\w*\.?|finish\w*|end\w*|stopp?\w*|out|termin\w*|beendet)|out of (?:the\s+)?plating(?:\s+(?:tank|bath|line|solution))?|removed from (?:the\s+)?(?:plating|tank|bath)(?:\s+(?:tank|bath|line|solution))?|left (?:the\s+)?plating(?:\s+(?:tank|bath|line|solution))?|plated (?:at|on|:)|(?:cadmium|zinc)\s+plated/giu;
 
 /** When the parts came out of the plating bath. */
 export function platingEnds(paper: Paper): Candidate<string>[] {
@@ -23,15 +23,11 @@ export function platingEnds(paper: Paper): Candidate<string>[] {
   });
   if (asked.length > 0) return asked;
   return paper.paragraphs.flatMap((paragraph): Candidate<string>[] => {
-    const match = PLATED.exec(paragraph.text);
-    if (!match) return [];
-    const after = passageFrom(
-      paragraph,
-      match.index + match[0].length,
-      clauseEnd(paragraph.text, match.index),
-    );
-    const found = momentOf(paper, after, null);
-    return found ? [{ ...found, trust: 0.75 }] : [];
+    return [...paragraph.text.matchAll(PLATED)].flatMap((match) => {
+      const end = match.index + match[0].length;
+      const found = momentOf(paper, passageFrom(paragraph, end, clauseEnd(paragraph.text, end)), null);
+      return found ? [{ ...found, trust: 0.75 }] : [];
+    });
   });
 }
 

@@ -33,7 +33,7 @@ const SAID: readonly (readonly [Step, string])[] = [
   ],
   [
     'solution',
-    String.raw`sol(?:utio)?n\.?(?:[- ]?heat)?[- ]?treat(?:ed|ment|ing)?|solution[- ](?:heat|anneal(?:ed)?|annealing)|solutioni[sz](?:e|ed|ing)|solution|sol(?:utio)?n\.?[- ]h\.?t\.?|soln\.?|s\.?h\.?t\.?|l[oö]sungsgl[uü]h\w*|mise en solution|solubilizaci[oó]n`,
+    String.raw`sol(?:utio)?n\.?(?:[- ]?heat)?[- ]?treat(?:ed|ment|ing)?|solution[- ](?:heat|anneal(?:ed)?|annealing)|solutioni[sz](?:e|ed|ing)|solution|sol(?:utio)?n?\.?[- ]h\.?t\.?|sol\.[- ]?treat(?:ed|ment|ing)?|sol\. ?(?:h\.?t\.?|&|\+)|soln\.?|s\.?h\.?t\.?|l[oö]sungsgl[uü]h\w*|mise en solution|solubilizaci[oó]n`,
   ],
   ['normalize', String.raw`normali[sz](?:e|ed|ing)|normalgl[uü]h\w*|normalisation`],
   [
