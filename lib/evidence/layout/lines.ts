@@ -1,6 +1,7 @@
 import type { Box, Mark, Page, Word } from '../page';
 import { boxAround, heightOf, middleOf, sharedDown, widthOf } from './box';
 import { passageOf, type Passage } from './passage';
+import { tickedOnly } from './ticked';
 
 /** Words that stand together on a line, apart from what stands further along it: a cell, a label, a value. */
 export interface Segment extends Passage {
@@ -23,7 +24,7 @@ export interface Line {
  */
 export function linesOf(page: Page): Line[] {
   const upright = page.words.filter(({ text }) => text.trim() !== '');
-  const rows = rowsOf(upright);
+  const rows = tickedOnly(rowsOf(upright)).filter(({ length }) => length > 0);
   const fences = page.marks.filter(({ kind, box }) => kind === 'rule' && heightOf(box) > widthOf(box));
   return rows.map((words, index) => {
     const height = usualHeight(words);

@@ -32,6 +32,10 @@ export interface HeadingReader<Heading> {
   readonly holds?: (headings: readonly (Heading | null)[]) => boolean;
   /** Whether a line of the page can be no row of a table: it begins with a label and its colon. */
   readonly endsTable: (segment: Segment) => boolean;
+  /** Whether a line can be a row under these headings; all are where it is not asked. */
+  readonly isRow?: (cells: readonly (Passage | null)[], headings: readonly (Heading | null)[]) => boolean;
+  /** Whether a cell of that column begins a row; without it all do. */
+  readonly begins?: (cell: string, heading: Heading) => boolean;
   /** The column whose cells begin a row; a line without it continues the row above. */
   readonly anchors: (heading: Heading) => boolean;
 }
@@ -76,7 +80,11 @@ function headingAt<Heading>(
       )
     )
       break;
-    const columns = columnsOf(used).map((column) => ({ ...column, heading: reader.read(column.text) }));
+    const columns = columnsOf(used).map(({ text, box, parts }) => ({
+      text,
+      box,
+      heading: reader.read(text) ?? (parts.length > 1 ? (readAny(parts, reader) ?? null) : null),
+    }));
     const known = columns.filter(({ heading }) => heading !== null).length;
     if (
       known < 2 ||
@@ -91,6 +99,15 @@ function headingAt<Heading>(
     if (!best || known > best.known || (known === best.known && isPart)) best = { columns, height, known };
   }
   return best;
+}
+
+/** Of a heading over several lines that says nothing as a whole, what its last line says, or one above. */
+function readAny<Heading>(parts: readonly string[], { read }: HeadingReader<Heading>): Heading | null {
+  for (const part of [...parts].reverse()) {
+    const heading = read(part);
+    if (heading !== null) return heading;
+  }
+  return null;
 }
 
 const isUnderHeading = ({ box }: Segment, columns: readonly Column<unknown>[]): boolean =>
@@ -112,7 +129,7 @@ function withRowHeads<Heading>(
 }
 
 /** Segments that stand above one another are one cell of the heading. */
-function columnsOf(lines: readonly Line[]): { text: string; box: Box }[] {
+function columnsOf(lines: readonly Line[]): { text: string; box: Box; parts: string[] }[] {
   const cells: { parts: Segment[]; box: Box }[] = [];
   for (const segment of lines.flatMap(({ segments }) => segments)) {
     const cell = cells.find(({ box }) => sharedAcross(box, segment.box) > 0);
@@ -123,7 +140,10 @@ function columnsOf(lines: readonly Line[]): { text: string; box: Box }[] {
   }
   return cells
     .sort((a, b) => a.box[0] - b.box[0])
-    .map(({ parts, box }) => ({ text: parts.map(({ text }) => text).join(' '), box }));
+    .map(({ parts, box }) => {
+      const texts = parts.map(({ text }) => text);
+      return { text: texts.join(' '), box, parts: texts };
+    });
 }
 
 function tableUnder<Heading>(
@@ -148,8 +168,16 @@ function tableUnder<Heading>(
     )
       break;
     const cells = cellsOf(line, columns);
+    if (rows.length > 0 && reader.isRow) {
+      const whole = cells.map((cell) => (cell.length === 0 ? null : joined(cell)));
+      const headings = columns.map(({ heading }) => heading);
+      if (!reader.isRow(whole, headings)) break;
+    }
     const last = rows[rows.length - 1];
-    const begins = !last || (cells[anchor]?.length ?? 0) > 0 || line.box[1] - last.box[3] > 1.2 * line.height;
+    const begins =
+      !last ||
+      beginsRow(cells[anchor] ?? [], columns[anchor]?.heading, reader) ||
+      line.box[1] - last.box[3] > 1.2 * line.height;
     if (!begins) {
       cells.forEach((cell, index) => last.cells[index]?.push(...cell));
       last.box = boxAround([last.box, line.box]);
@@ -166,6 +194,15 @@ function tableUnder<Heading>(
       cells: cells.map((cell) => (cell.length === 0 ? null : joined(cell))),
     })),
   };
+}
+
+function beginsRow<Heading>(
+  cell: readonly Passage[],
+  heading: Heading | null | undefined,
+  reader: HeadingReader<Heading>,
+): boolean {
+  if (cell.length === 0) return false;
+  return !heading || !reader.begins || reader.begins(joined(cell).text, heading);
 }
 
 /** Further below the line above than rows of this table are from one another. */
@@ -188,6 +225,8 @@ function endsAt<Heading>(
   if (headingAt(lines, at, reader) !== null) return true;
   const [only, second, third] = line.segments;
   if (line.segments.some(({ text }) => SUM.test(text))) return true;
+  // A note under the table.
+  if (/^[*†‡]/.test(only?.text ?? '')) return true;
   // Nothing but labels: the next row of a form whose values stand below.
   if (line.segments.every(({ text }) => text.length > 2 && reader.read(text) !== null)) return true;
   // A label with its value under a table of more columns is a field of its own.
@@ -201,7 +240,8 @@ function endsAt<Heading>(
 }
 
 /** A row that adds up the others is the last, and none of them. */
-const SUM = /^(?:grand |sub-?)?(?:totals?|summe|gesamt|sum)\b\s*:?(?:\s*\d*)$/i;
+const SUM =
+  /^(?:grand |sub-?)?(?:totals?|summe|gesamt|sum|avg\.?|average|mean|mittelwert|moyenne|media)\s*:?(?:\s*\d*(?:[.,]\d+)?)$/i;
 
 /** The words of a line, each in the column it stands under. */
 function cellsOf(line: Line, columns: readonly Column<unknown>[]): Passage[][] {

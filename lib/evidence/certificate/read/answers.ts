@@ -23,6 +23,8 @@ export interface Answer {
   /** Row of a table, the same for all answers from it. */
   readonly row: string | null;
   readonly marked: boolean;
+  /** Of a registration of the house, as at the foot of a form: it says nothing of this work. */
+  readonly registered?: true;
 }
 
 export interface AnswerValue {
@@ -43,7 +45,8 @@ export const TRUST: Readonly<Record<AnswerValue['how'], number>> = {
 export function answersOf(sheets: readonly Sheet[]): Answer[] {
   return sheets
     .flatMap((sheet) => [
-      ...sheet.asked.map(({ label, spot, section, values, order }): Answer => ({
+      ...sheet.asked.map(({ label, spot, section, values, order, before }): Answer => ({
+        ...(REGISTERED.test(before) && { registered: true as const }),
         key: label.key,
         words: label.words,
         also: label.also,
@@ -63,6 +66,9 @@ export function answersOf(sheets: readonly Sheet[]): Answer[] {
     ])
     .sort((a, b) => a.order - b.order);
 }
+
+const REGISTERED =
+  /\b(?:AS\s?9\d{3}|EN\s?9\d{3}|ISO|nadcap|regist\w+|accredit\w+|A2LA|approv\w+ to|FAA|EASA|repair station|cage)\b/i;
 
 type LabelTable = Table<FoundLabel>;
 
@@ -125,12 +131,29 @@ function rowLabelled({ table, row, name, order, section }: RowPlace): Answer[] |
         order: order + turn,
         page: table.page,
         label: null,
-        row: name,
+        // Items side by side: each column is a line of the certificate.
+        row:
+          asks === places && ASKS_OF_LINES.has(label.key)
+            ? `${name.split('.').slice(0, 2).join('.')}.column${column}`
+            : name,
         marked: true,
       },
     ];
   });
 }
+
+const ASKS_OF_LINES: ReadonlySet<LabelKey> = new Set([
+  'part_number',
+  'revision',
+  'material',
+  'lot',
+  'heat',
+  'serial',
+  'quantity',
+  'quantity_accepted',
+  'quantity_rejected',
+  'quantity_received',
+]);
 
 function byColumn({ table, row, name, order, section }: RowPlace): Answer[] {
   const namedBy = row.cells.find(

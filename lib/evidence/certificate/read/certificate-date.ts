@@ -87,16 +87,22 @@ function standingAlone(paper: Paper): Candidate<string | null>[] {
 
 function dayAlone(paper: Paper, segment: Passage, down: number): Candidate<string | null>[] {
   const [found] = daysIn(segment.text);
-  if (!found || paper.answers.some((answer) => coversOther(answer, segment))) return [];
+  if (!found) return [];
   const before = segment.text.slice(0, found.start);
+  const numbered = NUMBERED_AND_DATED.test(before);
+  if (!numbered && paper.answers.some((answer) => coversOther(answer, segment))) return [];
   const spot = spotIn(segment, found.start, found.end);
   if (!spot || ANOTHER.test(before) || /\d:\d\d/.test(segment.text)) return [];
   const alone =
     before.replace(/^[^,]{0,30},\s*$/, '').trim().length < 3 && segment.text.length - found.end < 3;
-  const said = /\b(?:dated|date|issued|certified|signed)\b[^.]{0,20}$/i.test(before) ? 0.7 : 0;
+  const said = /\b(?:dated|date|issued|certified|signed)\b[^.]{0,20}$/i.test(before) || numbered ? 0.7 : 0;
   const trust = alone && down < 0.45 ? 0.75 : Math.max(said, alone ? 0.5 : 0);
   return trust > 0 ? [{ value: dayOf(found, paper.dayOrder), spot, trust }] : [];
 }
+
+/** "Certificat N° 26-118 du", "Zeugnis Nr. 4711 vom". */
+const NUMBERED_AND_DATED =
+  /\b(?:certificat\w*|cert|zeugnis\w*|bescheinigung\w*|report|certificado|certificato)\b(?:(?!order|\bp\.?o\b)[^;]){0,50}(?:\b(?:du|vom|dtd|dated|issued(?: on)?|of|del|de fecha)|\d\S*\s*[-–,·|/])\s*$/i;
 
 /** The segment is what another label than a plain date asks for. */
 function coversOther(answer: Answer, segment: Passage): boolean {

@@ -1,11 +1,12 @@
 import { spotIn, type Passage, type Spot } from '../../layout/passage';
 import { TRUST, type Answer } from './answers';
 import type { Candidate } from './candidates';
-import { wordsIn } from './codes';
+import { changeInTwoPlaces, joinedParts } from './class-parts';
+import { annealed, wordsIn } from './codes';
 import type { Paper } from './paper';
 
 const ROMAN = String.raw`(?:[IVXl1|]{1,4}[A-C]?|\d{1,2}[A-C]?|[A-D])(?![\p{L}\d])`;
-const KIND = String.raw`(?:type|SC|class|method|grade|form|ty\.|cl\.|sensitivity(?:\s+level)?|level|typ|klasse|classe|tipo|clase|m[eé]thode|methode)`;
+const KIND = String.raw`(?:type|SC|class|method|grade|form|ty\.?|cl\.?|gr\.?|sensitivity(?:\s+level)?|level|typ|klasse|classe|tipo|clase|m[eé]thode|methode)`;
 const DESIGNATION = new RegExp(
   String.raw`(?<![\p{L}])${KIND}\.?\s*:?\s*${ROMAN}(?:\s*(?:[,;/&]|and|-)?\s*${KIND}\.?\s*:?\s*${ROMAN})*`,
   'giu',
@@ -37,7 +38,15 @@ export function classTypes(
   const rest = behind ? designation(behind.rest) : null;
   const fromSpecification = rest && behind ? [{ value: rest, spot: behind.spot, trust: 0.9 }] : [];
   const said = paper.paragraphs.flatMap((paragraph) => designationsIn(paragraph));
-  return [...asked, ...labelled, ...changes, ...fromSpecification, ...said];
+  return [
+    ...joinedParts(paper),
+    ...changeInTwoPlaces(paper),
+    ...asked,
+    ...labelled,
+    ...changes,
+    ...fromSpecification,
+    ...said,
+  ];
 }
 
 function changeIn(passage: Passage): Candidate<string>[] {
@@ -59,12 +68,12 @@ function conditionChange(answer: Answer): Candidate<string>[] {
     const match = CHANGE.exec(passage.text);
     const spot = match && spotIn(passage, 0, passage.text.length);
     if (spot && !ALUMINIUM_CHANGE.test(passage.text))
-      return [{ value: passage.text.trim(), spot, trust: 0.85 * TRUST[how] }];
+      return [{ value: annealed(passage.text.trim()), spot, trust: 0.85 * TRUST[how] }];
   }
   return [];
 }
 
-/** One form may ask for type and class in two places: together they are the designation. */
+/** What is asked for as type, class and the like. */
 function joinedUp(answers: readonly Answer[]): Candidate<string>[] {
   const read = answers.flatMap((answer) => {
     for (const { passage, how } of answer.values) {
@@ -81,15 +90,13 @@ function joinedUp(answers: readonly Answer[]): Candidate<string>[] {
     const single =
       /^(?:type|class|grade|typ|klasse|classe|tipo|clase)$/.test(name) &&
       new RegExp(`^${ROMAN}$`, 'iu').test(words.value);
-    const text = single ? `${english(name)} ${roman(words.value)}` : (said ?? words.value);
+    const text = single ? `${english(name)} ${roman(words.value)}` : (said ?? annealed(words.value));
     if (!single && !said && !/\d/.test(text) && !/^[\p{L}\s,/-]{5,40}$/u.test(text)) continue;
     if (!parts.some((part) => part.text === text)) parts.push({ name, text, spot: words.spot, trust });
   }
   const [first] = parts;
   if (!first) return [];
-  const singles = parts.filter(({ text }) => /^(?:Type|Class|Grade) \S+$/.test(text));
-  const value = singles.length > 1 ? singles.map(({ text }) => text).join(' ') : first.text;
-  return [{ value, spot: first.spot, trust: first.trust }];
+  return [{ value: first.text, spot: first.spot, trust: first.trust * (parts.length > 1 ? 0.9 : 1) }];
 }
 
 const ENGLISH: Readonly<Record<string, string>> = {
@@ -100,6 +107,7 @@ const ENGLISH: Readonly<Record<string, string>> = {
   classe: 'Class',
   clase: 'Class',
   cl: 'Class',
+  gr: 'Grade',
   methode: 'Method',
   méthode: 'Method',
 };

@@ -161,3 +161,7 @@ export function wordsIn(passage: Passage): Reading<string> | null {
   if (!/[\p{L}\p{N}]/u.test(value) || /^(?:n\/?a|none|-+)$/i.test(value)) return null;
   return readingAt(passage, 0, passage.text.length, value);
 }
+
+/** No temper is nought: 2024-0 is 2024-O. */
+export const annealed = (material: string): string =>
+  material.replace(/(?<![\d-])([1-8]\d{3})-0(?![\d.])/g, '$1-O');

@@ -15,7 +15,7 @@ export interface CycleAttributes {
 const LIMIT_AFTER =
   /^\s*(?:\(?\s*)(?:min(?:imum)?|max(?:imum)?|required|req'?d|or (?:more|less|longer)|nominal)\b(?!\s*[.:]?\s*\d)/i;
 const LIMIT_BEFORE =
-  /(?:min(?:imum|\.)?(?: of)?|max(?:imum|\.)?(?: of)?|at least|not (?:less|more|exceeding|to exceed)(?: than)?|no (?:less|more) than|required|req'?d|≥|≤|>=|<=|<|>|limit|up to|within|allowed|spec(?:ified)?)\s*:?\s*$/i;
+  /(?:min(?:imum|\.)?(?: of)?|max(?:imum|\.)?(?: of)?|at least|not (?:less|more|exceeding|to exceed)(?: than)?|no (?:less|more) than|required|req'?d|≥|≤|>=|<=|<|>|limit|up to|within|allowed|spec(?:ified)?)\s*:?\s*$|\d\s*(?:°\s?[FC]|hrs?|hours?|min|h)?\s?[-–]\s?$/i;
 
 export const isLimit = (
   text: string,
@@ -55,8 +55,9 @@ export function cycleAttributesIn(
     return moment && spot ? { moment, spot } : null;
   };
   const start = asked !== null && END_KEYS.has(asked) ? null : at(first && withDayNearby(first, moments));
+  const isEnd = first && second && GOES_ON_TO.test(text.slice(first.end, second.start));
   const endOfBoth =
-    second && (asked === null || !START_KEYS.has(asked)) ? at(withDayNearby(second, moments)) : null;
+    second && (asked === null || !START_KEYS.has(asked) || isEnd) ? at(withDayNearby(second, moments)) : null;
   const end = asked !== null && END_KEYS.has(asked) ? at(first) : endOfBoth;
   const paired = asked !== null || end !== null ? start : null;
   return {
@@ -66,6 +67,10 @@ export function cycleAttributesIn(
     ...(end && { end }),
   };
 }
+
+/** Between a start and its end: "to", "quenched", a dash. */
+const GOES_ON_TO =
+  /^[\s,;]*(?:-|–|—|to|until|till|thru|through|bis|[àa]|hasta|out|off|ended|end|finish\w*|quench\w*|discharg\w*|remov\w*|unload\w*)(?![\p{L}])/iu;
 
 /** The time before which the plating ended is none of the bake's. */
 const PLATED_THEN = /\bplat(?:ing|ed)\b[^,;.]{0,24}$/i;

@@ -2,6 +2,7 @@ import type { Process } from '../../../trade/process';
 import { passageFrom, type Passage, type Spot } from '../../layout/passage';
 import { TRUST, type Answer } from './answers';
 import { cycleAttributesIn, type CycleAttributes } from './cycle-attributes';
+import { completeTimes, type ReadCycle, type ReadValue } from './cycle-times';
 import { dayOf } from './dates';
 import type { LabelKey } from './labels';
 import { timesIn, type FoundMoment } from './moments';
@@ -9,26 +10,12 @@ import type { Paper } from './paper';
 import { stepsIn, type Step } from './steps';
 import { localMinute, type WorkDays, workDaysOf } from './work-days';
 
-export interface ReadValue<Value> {
-  readonly value: Value;
-  readonly spot: Spot;
-  readonly trust: number;
-}
-
-/** A cycle as far as it was read. */
-export interface ReadCycle {
-  readonly step: Step;
-  temperature?: ReadValue<number>;
-  unit?: 'F' | 'C';
-  minutes?: ReadValue<number>;
-  start?: ReadValue<string>;
-  end?: ReadValue<string>;
-}
-
 interface Observation {
   readonly step: Step;
   readonly attributes: CycleAttributes;
   readonly trust: number;
+  /** Of the load into and out of the furnace; where the soak's own times are stated they count. */
+  readonly isLoading?: boolean;
   /** For the day of a time without one. */
   readonly row: string | null;
   readonly order: number;
@@ -62,13 +49,19 @@ const CYCLE_KEYS: ReadonlySet<LabelKey> = new Set([
   'process',
   'condition',
   'quench_medium',
+  'result',
 ]);
+const LOADING = /load|charge/;
 const BAKE_KEYS: ReadonlySet<LabelKey> = new Set(['bake', 'bake_start', 'bake_end']);
 
 /** The cycles that were run, each step once, in the order in which the document has them. */
 export function readCycles(paper: Paper, process: Process | null): ReadCycle[] {
   const days = workDaysOf(paper);
-  const observations = [...asked(paper, process), ...said(paper, process)];
+  const seenAll = [...asked(paper, process), ...said(paper, process)];
+  const observations = [
+    ...seenAll.filter((one) => !one.isLoading),
+    ...seenAll.filter((one) => one.isLoading),
+  ];
   const cycles: ReadCycle[] = [];
   for (const seen of observations) {
     const step = settled(seen, process, observations);
@@ -80,7 +73,7 @@ export function readCycles(paper: Paper, process: Process | null): ReadCycle[] {
     }
     take(cycle, seen, paper, days);
   }
-  for (const cycle of cycles) complete(cycle);
+  for (const cycle of cycles) completeTimes(cycle);
   return cycles.filter(({ temperature, minutes, start, end }) => temperature ?? minutes ?? start ?? end);
 }
 
@@ -106,6 +99,7 @@ function asked(paper: Paper, process: Process | null): Observation[] {
           step,
           attributes,
           trust: TRUST[how] * (answer.step || answer.section ? 1 : 0.95),
+          isLoading: LOADING.test(answer.words),
           row: answer.row,
           order: answer.order,
         },
@@ -119,6 +113,8 @@ const textOf = ({ values }: Answer): string => values[0]?.passage.text ?? '';
 
 function stepOf(answer: Answer, process: Process | null): Step | null {
   if (BAKE_KEYS.has(answer.key)) return /stress/.test(answer.words) ? 'stress_relief' : bakeStep(process);
+  // "Achieved 900 °F for 44 min" in a step's part of the form.
+  if (answer.key === 'result') return answer.row === null ? (answer.step ?? answer.section) : null;
   if (answer.key === 'process' || answer.key === 'condition' || answer.key === 'quench_medium') {
     const named = answer.step ?? stepsIn(answer.words)[0]?.step ?? null;
     return answer.key === 'quench_medium' ? null : named;
@@ -236,7 +232,10 @@ function take(
       ? afterStart(cycle.start.value, end.moment.time)
       : null;
   const to = withStartDay && end ? { value: withStartDay, spot: end.spot, trust: trust * 0.95 } : moment(end);
-  if (to) cycle.end ??= to;
+  if (to) {
+    if (!cycle.end && end && !end.moment.day && !days.hasTwo(row)) cycle.endsOnUnsaidDay = true;
+    cycle.end ??= to;
+  }
 }
 
 /** A time without a day ends on the day of the start, or on the next when it is earlier in the day. */
@@ -254,19 +253,4 @@ function usualUnit({ text }: Paper, value: number): 'F' | 'C' | null {
   const celsius = /°\s?C\b|\bdeg\.?\s?C\b|\(C\)/.test(text);
   if (fahrenheit === celsius || !(value > 0)) return null;
   return fahrenheit ? 'F' : 'C';
-}
-
-/**
- * From start to end, where the minutes are not stated, or where a decimal sign got lost on the way through a scanner: ten
- * times as long as the times are apart.
- */
-function complete(cycle: ReadCycle): void {
-  const { start, end, minutes } = cycle;
-  if (!start || !end) return;
-  const between = (Date.parse(`${end.value}Z`) - Date.parse(`${start.value}Z`)) / 60_000;
-  if (between <= 0) return;
-  const spot = minutes?.spot ?? end.spot;
-  const lost = minutes !== undefined && spot.legible < 1 && Math.abs(minutes.value / between - 10) < 0.05;
-  const trust = Math.min(start.trust, end.trust) * (lost ? 0.7 : 0.95);
-  if (!minutes || lost) cycle.minutes = { value: between, spot, trust };
 }

@@ -23,6 +23,7 @@ const EUROPEAN = [
   /\b[A-Z]{1,2}\d[A-Z\d]?\s+\d[A-Z]{2}\b/,
   /\b(?:Deutschland|Germany|France|England|United Kingdom|UK|Italia|Nederland|Schweiz|Austria)\b/,
   /[äöüßéèàçñ]/i,
+  /\b(?:ordine|materiale|lotto|commande|mati[eè]re|pi[eè]ces?|bestellung|werkstoff|pedido|piezas?|lote|bestelling|ordrenummer|delenummer)\b/i,
 ];
 
 /** The order, and whether the days themselves show it; else it follows from where the document seems to come from. */

@@ -29,12 +29,29 @@ interface Phrase {
 }
 
 const WORDS: Readonly<Record<string, string>> = {
-  no: String.raw`(?:n[°ºo]s?|nr|num|numbers?|nbr|numero|nummer|#)`,
+  QTY: String.raw`(?:qty|q['’ ]?ty|quantity|quant|pcs|pc s|pieces|parts|units|no of (?:pcs|pieces|parts)|total|q[. ]?ta|quantita)`,
+  ACC: "acc(?:ept(?:ed|able)?|ettat[aei]|[ '’]?d)?|good|ok(?:ay)?|pass(?:ed)?|conform(?:ing|ed)",
+  REJ: "rej(?:ect(?:ed|s)?|[ '’]?d)?|scartat[aei]|scrap(?:ped)?|fail(?:ed)?|non[ -]?conform(?:ing)?|nok|discrepant|defective|bad",
+  REC: "rec(?:eived|[ '’]?d)|rcvd|rcd|submitted|presented|ordered|in",
+  OUT: 'ship(?:ped)?|shpd|out|d[ei]spatched|d[ei]sp|delivered|returned|processed|treated|certified|released',
+  COND: 'condition|cond|temper',
+  no: String.raw`(?:n\.?[°ºo]s?|n(?=\.\s?:?\s*[^\s.])|nr|num|numbers?|nbr|numero|nummer|#)`,
   cert: String.raw`cert(?:ificate|ification|ificat|if)?`,
   spec: String.raw`spec(?:ification|s)?`,
   temp: String.raw`temp`,
   '%': '%',
   '&': '&',
+};
+
+/** With what the words of a group may begin. */
+const FIRST: Readonly<Record<string, readonly string[]>> = {
+  no: ['n', '#'],
+  QTY: ['q', 'p', 'u', 'n', 't'],
+  ACC: ['a', 'g', 'o', 'p', 'c'],
+  REJ: ['r', 's', 'f', 'n', 'd', 'b'],
+  REC: ['r', 's', 'p', 'o', 'i'],
+  OUT: ['s', 'o', 'd', 'r', 'p', 't', 'c'],
+  COND: ['c', 't'],
 };
 
 const BETWEEN = String.raw`[\s./_\-]{0,3}`;
@@ -43,7 +60,9 @@ function patternOf(words: readonly string[]): RegExp {
   const parts = words.map((word, index) => {
     const may = word.endsWith('?');
     const plain = may ? word.slice(0, -1) : word;
-    const said = WORDS[plain] ?? folded(plain);
+    // As folded texts have it: no l.
+    const group = /^[A-Z]+$/.test(plain) ? `(?:${(WORDS[plain] ?? '').replace(/l/g, 'i')})` : WORDS[plain];
+    const said = group ?? folded(plain);
     const before = index === 0 ? '' : BETWEEN;
     return may ? `(?:${before}${said})?` : `${before}${said}`;
   });
@@ -69,7 +88,7 @@ function indexed(): Map<string, Phrase[]> {
       numbered: words.some((word) => word === 'no' || word === 'no?'),
     };
     const letter = folded(words[0] ?? '').charAt(0);
-    const first = words[0]?.replace('?', '') === 'no' ? ['n', '#'] : [letter];
+    const first = FIRST[words[0]?.replace('?', '') ?? ''] ?? [letter];
     for (const sign of first) byLetter.set(sign, [...(byLetter.get(sign) ?? []), entry]);
   }
   return byLetter;
@@ -88,7 +107,13 @@ const UNIT =
 export function labelAtStart(text: string): FoundLabel | null {
   const lead = LEAD.exec(text)?.[0].length ?? 0;
   // Figures are folded into letters: "10:36" would begin with "i.O.".
-  return /[\p{L}#%]/u.test(text.charAt(lead)) ? labelAt(text, folded(text), lead, true) : null;
+  if (!/[\p{L}#%]/u.test(text.charAt(lead))) return null;
+  const plain = folded(text);
+  const found = labelAt(text, plain, lead, true);
+  // "Sertifikat / Certificate": a language that is not known before one that is.
+  const foreign = found ? null : /^[\p{L}][\p{L}\s.°'’-]{1,34}\s?\/\s?(?=\p{L})/u.exec(text.slice(lead));
+  const known = foreign && labelAt(text, plain, lead + foreign[0].length, true);
+  return known?.whole || known?.marked ? { ...known, start: lead } : found;
 }
 
 /**
@@ -103,30 +128,40 @@ export function labelsIn(text: string): FoundLabel[] {
   while (at < text.length) {
     const startsWord =
       at > 0 && /[^a-z0-9&]/.test(plain.charAt(at - 1)) && /[\p{L}#%]/u.test(text.charAt(at));
-    const label = startsWord ? labelAt(text, plain, at, false) : null;
+    const label = startsWord && !isUnitAt(text, at) ? labelAt(text, plain, at, false) : null;
     if (label) found.push(label);
     at = label ? label.end : at + 1;
   }
   return found;
 }
 
+/** Behind a figure "HRB" is its unit and asks for nothing. */
+const isUnitAt = (text: string, at: number): boolean =>
+  /\d\s*$/.test(text.slice(0, at)) &&
+  /^(?:HR[A-H]|HR\d\d[TN]|HV|HBW?|F|C|min|mins|minutes|hrs|hours|h|sec|s|pcs|pieces|ea|IACS|% IACS|mils?)(?![\p{L}])/iu.test(
+    text.slice(at),
+  );
+
 function labelAt(text: string, plain: string, at: number, first: boolean): FoundLabel | null {
   const bare = phraseAt(plain, at);
   const stepped = steppedAt(text, plain, at);
   const best = stepped && stepped.end > (bare?.end ?? 0) ? stepped : bare && { ...bare, step: null };
   if (!best) return null;
+  // "L55" is folded into "iss".
+  if ((text.slice(at, best.end).match(/\d/g)?.length ?? 0) * 2 > best.end - at) return null;
   // "PO-5001" is a number and no question for one.
-  if (/^-?\d|^[-/][\p{L}\d]/u.test(text.slice(best.end)) && !text.slice(at, best.end).endsWith('#'))
-    return null;
-  const tail = tailOf(text, plain, best.end, best.phrase.key);
-  if (best.phrase.needsColon && !/[:]/.test(text.slice(best.end, tail.end))) return null;
+  const glued = /^-?\d|^[-/][\p{L}\d]/u.test(text.slice(best.end));
+  if (glued && !text.slice(at, best.end).endsWith('#') && !asksTwice(text, plain, best.end)) return null;
+  const asked = apart(best.phrase.key, plain.slice(at, best.end));
+  const tail = tailOf(text, plain, best.end, asked.key);
+  if (best.phrase.needsColon && !/[:=…]|\.{2}/.test(text.slice(best.end, tail.end))) return null;
   const standsOut =
     first || tail.marked || (best.phrase.numbered && /[#.]\s*$|no|num/.test(plain.slice(at, best.end)));
   if (!standsOut) return null;
   return {
-    key: best.phrase.key,
+    key: asked.key,
     words: text.slice(at, best.end).toLowerCase(),
-    also: tail.also,
+    also: [...asked.also, ...tail.also],
     step: best.step,
     start: at,
     end: tail.end,
@@ -136,6 +171,18 @@ function labelAt(text: string, plain: string, at: number, first: boolean): Found
   };
 }
 
+/** "Acc/Rej": right behind a stroke stands another label and no part of a number. */
+const asksTwice = (text: string, plain: string, end: number): boolean =>
+  text.charAt(end) === '/' && !/\d/.test(text.charAt(end + 1)) && phraseAt(plain, end + 1) !== null;
+
+/** "Part/Rev" asks for both, "part rev" for the revision. */
+function apart(key: LabelKey, words: string): { key: LabelKey; also: readonly LabelKey[] } {
+  const owner = { revision: 'part_number', specification_revision: 'specification' } as const;
+  return (key === 'revision' || key === 'specification_revision') && /[a-z]\s*\/\s*(?:rev|iss)/.test(words)
+    ? { key: owner[key], also: [key] }
+    : { key, also: [] };
+}
+
 function phraseAt(plain: string, at: number): { phrase: Phrase; end: number } | null {
   let best: { phrase: Phrase; end: number } | null = null;
   for (const phrase of PHRASES.get(plain.charAt(at)) ?? []) {
@@ -143,6 +190,11 @@ function phraseAt(plain: string, at: number): { phrase: Phrase; end: number } | 
     const match = phrase.pattern.exec(plain);
     if (!match) continue;
     const end = at + match[0].length;
+    if (
+      phrase.needsColon &&
+      !/^\s*(?:[:/=]|\.{2,}|…|\.?\s*(?:[([][^)\]]{0,40}[)\]]\s*)?[:/])/.test(plain.slice(end))
+    )
+      continue;
     if (!best || end > best.end) best = { phrase, end };
   }
   return best;
@@ -203,6 +255,14 @@ function tailOf(text: string, plain: string, from: number, key: LabelKey): Tail 
     const [whole = '', inBrackets, inSquare, bare] = UNIT.exec(text.slice(end)) ?? [];
     if (whole === '') break;
     const words = inBrackets ?? inSquare ?? bare ?? '';
+    const inside = inBrackets === undefined ? null : phraseAt(folded(inBrackets), 0);
+    if (
+      inside &&
+      inside.end >= (inBrackets ?? '').length - 1 &&
+      inside.phrase.key !== key &&
+      !also.includes(inside.phrase.key)
+    )
+      also.push(inside.phrase.key);
     // A value in brackets with digits in it is a value: "(12 pcs)".
     if (inBrackets !== undefined && /\d{2}/.test(inBrackets) && !/hr|hv|hb|mm/i.test(inBrackets)) break;
     qualifier = `${qualifier} ${words}`.trim();
@@ -218,7 +278,7 @@ function secondLabel(
   plain: string,
   from: number,
 ): { key: LabelKey | null; end: number } | null {
-  const bridge = /^\s*(?:[/|&+]|and\b|et\b|und\b|[-–](?=\s))\s*/i.exec(text.slice(from));
+  const bridge = /^\s*(?:[/|&+,]|and\b|or\b|et\b|ou\b|und\b|oder\b|[-–](?=\s))\s*/i.exec(text.slice(from));
   if (!bridge) return furtherWords(text, plain, from);
   const at = from + bridge[0].length;
   const found = phraseAt(plain, at);

@@ -27,11 +27,11 @@ export const CERTIFICATE_NUMBER: CodeField = {
       'giu',
     ),
     new RegExp(
-      String.raw`\b(?:certificate|certification|certificat|report|zeugnis)\b[^.:;\d]{0,50}\bno\.?\s*:?\s*${CODE}`,
+      String.raw`\b(?:certificate|certification|certificat|cert|report|zeugnis)\b[^.:;\d]{0,50}\bno\.?\s*:?\s*${CODE}`,
       'giu',
     ),
     new RegExp(
-      String.raw`\b(?:certificate|certification|cert|coc)\.?\s+((?=[A-Z0-9./-]*\d)[A-Z]{1,5}-?[A-Z0-9./-]+|\d{2}-\d{3,}|\d{4,})`,
+      String.raw`\b(?:certificate|certification|cert|coc|certificate of (?:conformance|conformity|compliance|processing|treatment|heat treatment|analysis)|report)\.?\s+(?:[-–]\s+)?((?=[A-Z0-9./-]*\d)[A-Z]{1,5}-?[A-Z0-9./-]+|\d{2}-\d{3,}|\d{4,})`,
       'giu',
     ),
   ],
@@ -55,6 +55,8 @@ export const BATCH: CodeField = {
       String.raw`\b(?:(?:your|customer)\s+)?batch\s*(?:no\.?|nr\.?|number|#)?\s*:?\s*${CODE}`,
       'giu',
     ),
+    // As the orders of this product number them.
+    /(?<![\p{L}\d-])(B-\d{4})(?![\p{L}\d-])/gu,
   ],
 };
 
@@ -71,6 +73,7 @@ export function codesFor(paper: Paper, field: CodeField): Candidate<string>[] {
 }
 
 function fromAnswer(answer: Answer, field: CodeField): Candidate<string>[] {
+  if (answer.registered) return [];
   const turn = [answer.key, ...answer.also].findIndex((key) => field.keys.includes(key));
   if (turn < 0) return [];
   const found = fitting(answer, (passage) => readCode(passage));
@@ -81,12 +84,15 @@ function fromAnswer(answer: Answer, field: CodeField): Candidate<string>[] {
   const far = found.how === 'right' || found.how === 'below' ? 0.98 : 1;
   return [
     {
-      value: value.replace(/^P(?:0O|O0|0)(?=-?\d)/, 'PO'),
+      value: lettersOfOrder(value),
       spot: found.spot,
       trust: found.trust * far * (answer.marked ? 1 : 0.97),
     },
   ];
 }
+
+/** No order begins with P0. */
+const lettersOfOrder = (code: string): string => code.replace(/^P(?:0O|O0|0)(?=-?\d)/, 'PO');
 
 const readCode = (passage: Passage): Reading<string> | null => codeIn(passage, beginsWithDay);
 
@@ -96,7 +102,7 @@ function inSentence(passage: Passage, pattern: RegExp): Candidate<string>[] {
     const start = match.index + match[0].lastIndexOf(match[1] ?? '');
     if (!/\d/.test(value) || beginsWithDay(passage.text.slice(start))) return [];
     const found = readingAt(passage, start, start + value.length, value);
-    return found ? [{ ...found, trust: 0.7 }] : [];
+    return found ? [{ ...found, value: lettersOfOrder(found.value), trust: 0.7 }] : [];
   });
 }
 

@@ -1,6 +1,8 @@
 import type { Line } from '../../layout/lines';
 import { tablesOf, type Table } from '../../layout/tables';
+import type { Passage } from '../../layout/passage';
 import { labelAtStart, type FoundLabel } from './find-labels';
+import type { LabelKey } from './labels';
 import { stepsIn } from './steps';
 
 /** The tables of a page whose headings are labels. */
@@ -14,9 +16,41 @@ export function labelledTables(lines: readonly Line[]): Table<FoundLabel>[] {
       const label = labelAtStart(text);
       return label !== null && label.marked && /:/.test(text.slice(0, label.end));
     },
+    isRow: (cells, headings) =>
+      isRowOfParts(
+        cells,
+        headings.map((heading) => heading?.key ?? null),
+      ),
+    // A part's name under its number.
+    begins: (cell, { key }) => key !== 'part_number' || /\d/.test(cell),
     anchors: ({ key }) => key === 'part_number',
   }).map(withPartColumn);
 }
+
+/** A line right under a table of parts that has words where part numbers or pieces stand is none of its rows. */
+function isRowOfParts(cells: readonly (Passage | null)[], keys: readonly (LabelKey | null)[]): boolean {
+  const at = keys.indexOf('part_number');
+  const first = cells.find((cell) => cell !== null)?.text ?? '';
+  const label = labelAtStart(first);
+  if (at < 0)
+    return label === null || label.whole || keys[0] === label.key || !/\d/.test(first.slice(label.end));
+  // "Furnace #3", "Stress relieve 1100F"
+  if (at <= 1 && (stepsIn(first)[0]?.start === 0 || (label !== null && !label.whole))) return false;
+  const counts = cells.filter((_, index) => COUNTS.has(keys[index] ?? 'remarks'));
+  const part = cells[at]?.text ?? null;
+  const alone = cells.filter((cell) => cell !== null).length === 1;
+  // A part's name in a line under its number.
+  if (part !== null && !/\d/.test(part))
+    return alone && part.length < 30 && label === null && stepsIn(part).length === 0;
+  return part === null || counts.every((cell) => cell === null || /\d|^[-–]+$|none|nil/i.test(cell.text));
+}
+
+const COUNTS: ReadonlySet<LabelKey> = new Set([
+  'quantity',
+  'quantity_accepted',
+  'quantity_rejected',
+  'quantity_received',
+]);
 
 /** What a cell of a table's heading asks for: a label, or a step whose figures stand under it. */
 function headingOf(text: string): FoundLabel | null {
@@ -35,7 +69,7 @@ function headingOf(text: string): FoundLabel | null {
 
 /** Columns for the places or pieces of a test: "No. 2", "Specimen 3", "#4". */
 const PLACE_OF_TEST =
-  /^(?:(?:no|nr|specimen|sample|piece|pc|test|reading|probe|point|place|location|pos)\.?\s*#?|#)\s*\d{1,2}$/i;
+  /^(?:(?:no|nr|item|line|part|lot|specimen|sample|piece|pc|test|reading|probe|point|place|location|pos)\.?\s*#?|#)\s*\d{1,2}$/i;
 
 function plainHeading(key: FoundLabel['key'], text: string): FoundLabel {
   const words = text.toLowerCase();

@@ -1,5 +1,5 @@
 import { passageFrom, type Passage } from '../../layout/passage';
-import { countIn, partIn, readingAt, type Reading } from './codes';
+import { annealed, countIn, partIn, readingAt, type Reading } from './codes';
 import { beginsWithDay } from './identity';
 import type { ReadLine } from './lines';
 import type { Paper } from './paper';
@@ -7,21 +7,34 @@ import type { Paper } from './paper';
 const SENTENCE_TRUST = 0.8;
 
 const PART =
-  /\b(?:p\/?n\.?|part\s*(?:numbers?|no\.?|nos\.?|#)|parts?|drawing|dwg\.?|teile?-?(?:nr\.?|nummer)|r[eé]f(?:[eé]rence)?\.?)\s*:?\s*(?=[A-Z0-9./-]*\d)/giu;
+  /\b(?:p\/?n\.?|part\s*(?:numbers?|no\.?|nos\.?|#)|parts?|articles?|components?|items?(?=:)|drawing|dwg\.?|teile?-?(?:nr\.?|nummer)|r[eé]f(?:[eé]rence)?\.?)\s*:?\s*(?=[A-Z0-9./-]*\d)/giu;
 const COUNTS = {
   accepted: [
     /(?<![\p{L}\d.,/-])(\d{1,3}(?:,\d{3})+|\d+)\s*(?:\(\w+\)\s*)?(?:pcs?\.?|pieces?|parts?|ea\.?|units?)?\s*(?:were\s+|was\s+|are\s+|have been\s+)?(?:found\s+)?(?:accepted|acceptable|conforming|passed|good|acc\.|angenommen|accept[eé]es?|aceptadas?)/iu,
     /\b(?:accepted|acc|passed)\s*[:=]?\s*(\d[\d,]*)/iu,
   ],
   rejected: [
-    /(?<![\p{L}\d.,/-])(\d{1,3}(?:,\d{3})+|\d+|none|no|zero|nil)\s*(?:\(\w+\)\s*)?(?:pcs?\.?|pieces?|parts?|ea\.?|units?)?\s*(?:were\s+|was\s+|are\s+|have been\s+)?(?:rejected|rej\.|scrapped|rejects?\b|nonconforming|abgelehnt|rebut[eé]es?|rechazadas?)/iu,
+    /(?<![\p{L}\d.,/-])(\d{1,3}(?:,\d{3})+|\d+|none|no|zero|nil)\s*(?:\(\w+\)\s*)?(?:pcs?\.?|pieces?|parts?|ea\.?|units?)?\s*(?:were\s+|was\s+|are\s+|have been\s+)?(?:rejected|rej\.|scrap(?:ped)?|rejects?\b|nonconforming|abgelehnt|rebut[eé]es?|rechazadas?)/iu,
     /\b(?:rejected|rejects|rej)\s*[:=]?\s*(\d[\d,]*|none|nil)/iu,
   ],
   quantity: [
     /\b(?:qty|quantity|menge|quantit[eé]|cantidad)\.?\s*(?:of\s+)?[:=]?\s*(\d[\d,]*)/iu,
-    /(?<![\p{L}\d.,/-])(\d{1,3}(?:,\d{3})+|\d+)\s*(?:\(\w+\)\s*)?(?:pcs?\b\.?|pieces?\b|ea\b\.?|each\b|units?\b|parts?\b|st(?:ü|u)ck\b|pi[eè]ces\b|piezas\b)/iu,
+    /(?<![\p{L}\d.,/-])(\d{1,3}(?:,\d{3})+|\d+)\)?\s*(?:\(\w+\)\s*)?(?:pcs?\b\.?|pieces?\b|ea\b\.?|each\b|units?\b|parts?\b|st(?:ü|u)ck\b|pi[eè]ces\b|piezas\b)/iu,
   ],
 } as const;
+
+/** Up to what ends a material in a sentence; it has a figure in it. */
+const MATERIAL = String.raw`((?=[^,;:()]*\d)[A-Z0-9][^,;:()]{2,40}?)(?=\s*(?:[,;:()]|\.\s|\.?$|\blot\b|\bqty\b|\bheat\b|\d+\s*pcs))`;
+const MATERIALS: readonly RegExp[] = [
+  new RegExp(
+    String.raw`\b(?:lot|heat)\s*(?:no\.?|number|#)?\s*:?\s*(?=[A-Z0-9./-]*\d)[A-Z0-9./-]+\s+of\s+${MATERIAL}`,
+    'iu',
+  ),
+  new RegExp(
+    String.raw`\b(?:material|matl\.?|made (?:of|from)|manufactured from|werkstoff|mati[eè]re)\s*:?\s*${MATERIAL}`,
+    'iu',
+  ),
+];
 
 /** Lines told in sentences: "12 pcs of P/N 10-200 Rev A, lot L1, accepted 12, rejected 0". */
 export function linesInSentences(paper: Paper): ReadLine[] {
@@ -47,8 +60,9 @@ function linesIn(passage: Passage, paper: Paper): ReadLine[] {
   const parts = [...passage.text.matchAll(PART)];
   return parts.flatMap((match, index) => {
     const at = match.index + match[0].length;
-    const before = index === 0 ? 0 : match.index;
-    const until = parts[index + 1]?.index ?? passage.text.length;
+    const before = index === 0 ? 0 : begins(passage.text, match.index);
+    const next = parts[index + 1];
+    const until = next ? begins(passage.text, next.index) : passage.text.length;
     const read = partIn(passageFrom(passage, at, until), beginsWithDay);
     if (!read) return [];
     const trust = SENTENCE_TRUST;
@@ -66,13 +80,19 @@ function linesIn(passage: Passage, paper: Paper): ReadLine[] {
       /\blot\s*(?:no\.?|number|#|code)?\s*:?\s*((?=[A-Z0-9./-]*\d)[A-Z0-9][A-Z0-9./-]*[A-Z0-9]|\d+)/iu,
     );
     if (lot) line.lot = { ...lot, trust };
-    const material = said(
-      around,
-      /\b(?:material|matl\.?|made (?:of|from)|werkstoff|mati[eè]re)\s*:?\s*([A-Z0-9][^,;:()]{2,40}?)(?=\s*(?:[,;:()]|\.\s|\.?$|\blot\b|\bqty\b|\bheat\b|\d+\s*pcs))/iu,
-    );
-    if (material && /\d/.test(material.value)) line.material = { ...material, trust: 0.7 };
+    const material = MATERIALS.map((pattern) => said(around, pattern)).find((found) => found !== null);
+    if (material) line.material = { ...material, value: annealed(material.value), trust: 0.7 };
     return [line];
   });
+}
+
+/** Where what is told of a part begins: before its pieces, where they are counted first. */
+function begins(text: string, part: number): number {
+  const counted =
+    /[;,.]?\s*(?:and\s+)?(?:[\p{L}-]+\s+)?\(?\d[\d,]*\)?\s*(?:\(\w+\)\s*)?(?:pcs?\.?|pieces?|ea\.?|each|units?|off|x)\s*(?:,|of|-|–)?\s*$/iu.exec(
+      text.slice(0, part),
+    );
+  return counted ? counted.index + 1 : part;
 }
 
 function countElsewhere(paper: Paper, field: 'accepted' | 'rejected'): Reading<number> | null {

@@ -1,5 +1,5 @@
 import { TRUST, type Answer, type AnswerValue } from './answers';
-import { countIn, partIn, revisionIn, wordsIn, codeIn, type Reading } from './codes';
+import { annealed, countIn, partIn, readingAt, revisionIn, wordsIn, codeIn, type Reading } from './codes';
 import { beginsWithDay } from './identity';
 import type { LabelKey } from './labels';
 import type { Paper } from './paper';
@@ -24,6 +24,8 @@ export interface ReadLine {
   lot?: ReadCell<string>;
   heat?: ReadCell<string>;
   serials?: ReadCell<readonly string[]>;
+  /** Stands for the material where none is stated. */
+  alloy?: ReadCell<string>;
 }
 
 type Writer = (line: ReadLine, value: AnswerValue, paper: Paper) => boolean;
@@ -55,6 +57,12 @@ const WRITERS: Partial<Record<LabelKey, Writer>> = {
     if (read && read.value.length <= 80) line.material ??= { ...read, value: annealed(read.value) };
     return read !== null;
   },
+  alloy: (line, value) => {
+    const read = cell(wordsIn(value.passage), value);
+    if (read && /\d/.test(read.value) && read.value.length <= 80)
+      line.alloy ??= { ...read, value: annealed(read.value) };
+    return read !== null;
+  },
   lot: coded('lot'),
   heat: coded('heat'),
   serial: (line, value) => {
@@ -64,9 +72,6 @@ const WRITERS: Partial<Record<LabelKey, Writer>> = {
     return serials.length > 0;
   },
 };
-
-/** No temper is nought: 2024-0 is 2024-O. */
-const annealed = (material: string): string => material.replace(/(?<![\d-])([1-8]\d{3})-0(?![\d.])/g, '$1-O');
 
 function counted(field: 'quantity' | 'accepted' | 'rejected' | 'received'): Writer {
   return (line, value, paper) => {
@@ -86,14 +91,16 @@ function coded(field: 'lot' | 'heat'): Writer {
 
 /** All lines: of tables, of the form's fields, of sentences, whichever the certificate has. */
 export function readLines(paper: Paper): ReadLine[] {
-  const written = paper.answers.filter(({ key, also }) => WRITERS[key] ?? also.some((one) => WRITERS[one]));
+  const written = paper.answers
+    .map(asCount)
+    .filter(({ key, also }) => WRITERS[key] ?? also.some((one) => WRITERS[one]));
   const fromTables = tableLines(paper, written);
   const inForms = formLines(
     paper,
     written.filter(({ row }) => row === null || !fromTables.rows.has(row)),
     fromTables.lines.length > 0,
   );
-  const lines = fromTables.lines.length > 0 ? fromTables.lines : inForms.lines;
+  const lines = fromTables.lines.length > 0 ? complementary(fromTables.lines) : inForms.lines;
   const told = linesInSentences(paper);
   const found = lines.length > 0 ? lines : told;
   completeFrom(found, inForms.shared);
@@ -101,7 +108,52 @@ export function readLines(paper: Paper): ReadLine[] {
     const same = told.find(({ part }) => part?.value === line.part?.value);
     if (same && same !== line) completeFrom([line], same);
   }
+  for (const line of found) if (line.alloy) line.material ??= line.alloy;
+  const none = saidNone(paper);
+  if (none) for (const line of found) line.rejected ??= none;
   return withoutRepeats(found);
+}
+
+/** "Received 50" and "Shipped 50" ask for a day, unless pieces stand there. */
+function asCount(answer: Answer): Answer {
+  const counts = { received: 'quantity_received', recd: 'quantity_received', shipped: 'quantity' } as const;
+  const [, key] = Object.entries(counts).find(([words]) => words === answer.words.replace(/\W/g, '')) ?? [];
+  const [first] = answer.values;
+  return answer.key === 'other_date' &&
+    key &&
+    first &&
+    /^[\s:]*\d{1,6}\s*(?:pcs?|ea|pieces|parts)?\.?\s*$/i.test(first.passage.text)
+    ? { ...answer, key }
+    : answer;
+}
+
+/** Two tables may each tell a part of one line: the same part number, and nothing that both tell differently. */
+function complementary(lines: readonly ReadLine[]): ReadLine[] {
+  const whole: ReadLine[] = [];
+  for (const line of lines) {
+    const same = whole.find((one) => one.part?.value === line.part?.value && !contradict(one, line));
+    if (same) Object.assign(same, { ...line, ...same });
+    else whole.push(line);
+  }
+  return whole;
+}
+
+const contradict = (a: ReadLine, b: ReadLine): boolean =>
+  (Object.keys(b) as (keyof ReadLine)[]).some(
+    (key) => key !== 'part' && a[key] !== undefined && String(a[key].value) !== String(b[key]?.value),
+  ) || !(Object.keys(b) as (keyof ReadLine)[]).some((key) => a[key] === undefined);
+
+const NONE_REJECTED =
+  /\b(?:no|zero|none of the)\s+(?:parts?|pieces?|pcs\.?|items?)\s+(?:were\s+|was\s+|have been\s+)?rejected\b|\bno\s+rejects\b|\brejects?\s*:\s*(?:none|nil)\b|\bnone\s+(?:were|was)\s+rejected\b|\bkein(?:e)?\s+ausschuss\b|\baucune?\s+(?:pi[eè]ce\s+)?rebut/iu;
+
+/** What is said once of all lines: that no piece was rejected. */
+function saidNone({ paragraphs }: Paper): ReadCell<number> | null {
+  for (const paragraph of paragraphs) {
+    const match = NONE_REJECTED.exec(paragraph.text);
+    const read = match && readingAt(paragraph, match.index, match.index + match[0].length, 0);
+    if (read) return { ...read, trust: 0.8 };
+  }
+  return null;
 }
 
 function tableLines(paper: Paper, answers: readonly Answer[]): { lines: ReadLine[]; rows: Set<string> } {
@@ -181,7 +233,22 @@ function formLines(
   }
   const [first] = lines;
   if (first && lines.length === 1) completeFrom([first], before);
+  shareLast(lines);
   return { lines, shared: before };
+}
+
+/** Material and lot that stand behind the last of several parts, and at no other, are those of all. */
+function shareLast(lines: readonly ReadLine[]): void {
+  const last = lines[lines.length - 1];
+  const others = lines.slice(0, -1);
+  if (!last || others.length === 0) return;
+  const { material, lot, heat } = last;
+  if (others.some((line) => line.material ?? line.lot ?? line.heat)) return;
+  completeFrom(others.length > 1 ? others : [...others, {}], {
+    ...(material && { material }),
+    ...(lot && { lot }),
+    ...(heat && { heat }),
+  });
 }
 
 /** What is stated once for the whole certificate holds for each line that says nothing else; counts only for a single line. */
@@ -190,6 +257,7 @@ function completeFrom(lines: readonly ReadLine[], shared: ReadLine): void {
     if (shared.material) line.material ??= shared.material;
     if (shared.lot) line.lot ??= shared.lot;
     if (shared.heat) line.heat ??= shared.heat;
+    if (shared.alloy) line.alloy ??= shared.alloy;
     if (lines.length > 1) continue;
     const { accepted, rejected, quantity, received, rev, serials, part } = shared;
     if (part) line.part ??= part;

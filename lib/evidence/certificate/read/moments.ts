@@ -17,7 +17,7 @@ const CLOCK = new RegExp(
 
 /** Only where a time is asked for: 0912, 09.12. */
 const BARE_CLOCK = new RegExp(
-  String.raw`^\s*([012]?${D})[.\s]?([0-5]${D})\s*(?:h|hrs?|uhr)?\s*([ap]\.?m\.?)?\s*$`,
+  String.raw`^\s*([012]?${D})[.\s]?([0-5]${D})\s*(?:h|hrs?|uhr)?\s*([ap]\.?m\.?)?\s*[*†]?\s*$`,
   'iu',
 );
 
@@ -54,7 +54,7 @@ function clock(hours: string, minutes: string, half: string | undefined): string
 }
 
 /** What may stand between a day and its time, in either order. */
-const TOGETHER = /^(?:T|\s*(?:,|-|–|@|at|um|à|a las|\/|\|)?\s*)$/i;
+const TOGETHER = /^(?:T|\s*(?:,|-|–|@|at|on|um|am|le|à|a las|kl\.?|\/|\|)?\s*)$/i;
 
 /**
  * Days with their times, and those of either that stand alone.
@@ -67,6 +67,7 @@ export function momentsIn(text: string, asked = false): FoundMoment[] {
     ({ start, end }) => !days.some((day) => start < day.end && end > day.start),
   );
   if (asked && times.length === 0) times = bareTime(text, days);
+  else times = [...times, ...timesBehindDays(text, days)];
   const taken = new Set<FoundTime>();
   const whole = days.map((day): FoundMoment => {
     const time = times.find(
@@ -84,6 +85,19 @@ export function momentsIn(text: string, asked = false): FoundMoment[] {
     .filter((time) => !taken.has(time))
     .map(({ start, end, time }): FoundMoment => ({ start, end, day: null, time }));
   return [...whole, ...alone].sort((a, b) => a.start - b.start);
+}
+
+/** Four figures right behind a day, with nothing that makes them a quantity. */
+const BEHIND_DAY =
+  /^(?:\s+|\s*[@,/]\s*|\s+at\s+)([01]\d|2[0-3])([0-5]\d)(?![\d.,/°%-]|\s*(?:pcs|pieces|ea)\b)/i;
+
+function timesBehindDays(text: string, days: readonly FoundDay[]): FoundTime[] {
+  return days.flatMap(({ end }) => {
+    const [whole = '', hours = '', minutes = ''] = BEHIND_DAY.exec(text.slice(end)) ?? [];
+    const time = whole === '' ? null : clock(hours, minutes, undefined);
+    if (time === null || /^\s*(?:h(?:rs?)?|uhr)\b/i.test(text.slice(end + whole.length))) return [];
+    return [{ start: end + whole.length - 4, end: end + whole.length, time }];
+  });
 }
 
 function bareTime(text: string, days: readonly FoundDay[]): FoundTime[] {

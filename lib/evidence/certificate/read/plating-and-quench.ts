@@ -10,28 +10,41 @@ import { durationsIn, numberFrom } from './quantities';
 import { localMinute, workDaysOf } from './work-days';
 
 const PLATED =
-  /(?:plating|plate|platt\w*|cadmiage|zingage|beschichtung|d[eé]p[oô]t)\s+(?:was\s+)?(?:\w+\s+)?(?:complet\w+|finish\w*|end\w*|stopp?\w*|out|termin\w*|beendet)|out of (?:the\s+)?plating(?:\s+(?:tank|bath|line|solution))?|removed from (?:the\s+)?(?:plating|tank|bath)(?:\s+(?:tank|bath|line|solution))?|plated (?:at|on|:)|(?:cadmium|zinc)\s+plated/iu;
+  /\b(?:plating|plate|plt\.?|platt\w*|cadmiage|zingage|beschichtung|d[eé]p[oô]t)\s+(?:was\s+)?(?:\w+\s+)?(?:compl\w*\.?|finish\w*|end\w*|stopp?\w*|out|termin\w*|beendet)|out of (?:the\s+)?plating(?:\s+(?:tank|bath|line|solution))?|removed from (?:the\s+)?(?:plating|tank|bath)(?:\s+(?:tank|bath|line|solution))?|left (?:the\s+)?plating(?:\s+(?:tank|bath|line|solution))?|plated (?:at|on|:)|(?:cadmium|zinc)\s+plated/giu;
 
 /** When the parts came out of the plating bath. */
 export function platingEnds(paper: Paper): Candidate<string>[] {
   const days = workDaysOf(paper);
   const asked = paper.answers.flatMap((answer): Candidate<string>[] => {
-    if (answer.key !== 'plating_end') return [];
+    if (answer.key !== 'plating_end' && !(answer.key === 'time_out' && isPlatingRow(paper, answer)))
+      return [];
     const found = fitting(answer, (passage) => momentOf(paper, passage, days.at(answer.row, answer.order)));
     return found ? [found] : [];
   });
   if (asked.length > 0) return asked;
   return paper.paragraphs.flatMap((paragraph): Candidate<string>[] => {
-    const match = PLATED.exec(paragraph.text);
-    if (!match) return [];
-    const after = passageFrom(
-      paragraph,
-      match.index + match[0].length,
-      clauseEnd(paragraph.text, match.index),
-    );
-    const found = momentOf(paper, after, null);
-    return found ? [{ ...found, trust: 0.75 }] : [];
+    return [...paragraph.text.matchAll(PLATED)].flatMap((match) => {
+      const end = match.index + match[0].length;
+      const found = momentOf(paper, passageFrom(paragraph, end, clauseEnd(paragraph.text, end)), null);
+      return found ? [{ ...found, trust: 0.75 }] : [];
+    });
   });
+}
+
+/** The row of a record of operations that tells of the plating. */
+function isPlatingRow({ answers }: Paper, { row }: Answer): boolean {
+  const words = answers.flatMap((one) =>
+    one.row === row &&
+    one.row !== null &&
+    (one.key === 'process' || one.key === 'description' || one.key === 'remarks')
+      ? one.values.map(({ passage }) => passage.text)
+      : [],
+  );
+  return words.some(
+    (text) =>
+      /\b(?:plat(?:e|ed|ing)|cad(?:mium)?|zinc|nickel|chrom(?:e|ium))\b/i.test(text) &&
+      !/\b(?:strike|bak\w+|clean\w*|relief|pre-?plate|post-?plate)\b/i.test(text),
+  );
 }
 
 const clauseEnd = (text: string, from: number): number => {
@@ -48,15 +61,20 @@ function momentOf(paper: Paper, passage: Passage, workDay: string | null): Readi
 }
 
 const DELAY =
-  /(?:quench\s*delay|delay|transfer(?:red)?(?:\s+time)?|quench(?:ed)?(?:\s+\w+){0,5}\s+(?:within|in|after)|within|abschreckverzug|verzug|d[eé]lai)\W+(?:\w+\s+){0,5}?(?=\d)/giu;
+  /(?:quench\s*delay|furnace[- ]to[- ]quench|door[- ]to[- ]quench|(?:time|delay) to quench|delay|transfer(?:red)?(?:\s+time)?|quench(?:ed)?(?:\s+\w+){0,5}\s+(?:within|in|after)|within|abschreckverzug|verzug|d[eé]lai)\W+(?:\w+\s+){0,5}?(?=\d)/giu;
+/** "7 sec transfer", "6 s quench delay". */
+const BEFORE_DELAY =
+  /(?<![\d.,-])(?=\d+(?:[.,]\d+)?\s*-?\s*(?:s|secs?|seconds?)\.?\s+(?:max\.?\s+)?(?:quench|transfer|delay|to quench|from (?:furnace|door)))/giu;
 const SECONDS = /^(\d+(?:[.,]\d+)?)\s*-?\s*(?:s|sec|secs|seconds?|sek\.?|sekunden|secondes?)(?![\p{L}])/iu;
 
 /** Seconds from opening the furnace until the parts are in the quench. */
 export function quenchDelays(paper: Paper): Candidate<number>[] {
   const asked = paper.answers.flatMap((answer): Candidate<number>[] => {
     if (answer.also.includes('requirement')) return [];
-    if (answer.key === 'quench_delay') {
-      const found = fitting(answer, (passage) => secondsOf(paper, passage, answer));
+    if (answer.key === 'quench_delay' || answer.key === 'quench_medium') {
+      const found = fitting(answer, (passage) =>
+        answer.key === 'quench_delay' ? secondsOf(paper, passage, answer) : secondsBeside(paper, passage),
+      );
       return found ? [found] : [];
     }
     return [];
@@ -64,7 +82,7 @@ export function quenchDelays(paper: Paper): Candidate<number>[] {
   if (asked.length > 0) return asked;
   return paper.paragraphs.flatMap((paragraph) => {
     const found: Candidate<number>[] = [];
-    for (const match of paragraph.text.matchAll(DELAY)) {
+    for (const match of [...paragraph.text.matchAll(DELAY), ...paragraph.text.matchAll(BEFORE_DELAY)]) {
       const at = match.index + match[0].length;
       const seconds = SECONDS.exec(paragraph.text.slice(at));
       const spot = seconds && spotIn(paragraph, match.index, at + seconds[0].length);
@@ -102,9 +120,20 @@ function secondsOf(paper: Paper, passage: Passage, { qualifier, words }: Answer)
     : null;
 }
 
+/** "Oil, 9 s" where the medium was asked for. */
+function secondsBeside(paper: Paper, passage: Passage): Reading<number> | null {
+  const all = durationsIn(passage.text, paper.decimal).filter(
+    (one) => one.value < 1 && !isLimit(passage.text, one),
+  );
+  const [only] = all;
+  return only && all.length === 1
+    ? readingAt(passage, only.start, only.end, Math.round(only.value * 600) / 10)
+    : null;
+}
+
 const MEDIA: readonly (readonly [RegExp, string])[] = [
   [/\b(?:polymer|glycol|glykol|pag|uc?on)\b/iu, 'polymer'],
-  [/\b(?:water|wasser|eau|agua|acqua)\b/iu, 'water'],
+  [/\b(?:water|wasser|eau|agua|acqua|vann|vatten|h2o)\b/iu, 'water'],
   [/(?:\boil|(?:ö|\bo)l(?:bad)?|\bhuile|\baceite)(?![\p{L}])/iu, 'oil'],
   [/\b(?:nitrogen|stickstoff|azote|n2)\b/iu, 'nitrogen'],
   [/\b(?:argon)\b/iu, 'argon'],

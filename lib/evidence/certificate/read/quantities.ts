@@ -45,7 +45,7 @@ export interface FoundTemperature extends FoundQuantity {
 }
 
 const TEMPERATURE =
-  /(?<![\d.,])(\d{2,4}(?:[.,]\d)?|[1-2][.,]\d{3}(?![\d])|\d{4}0(?=\s?[FC]\b))\s*(?:(?:[+/]*[±+][/\-]*|\+\s*\/\s*-)\s*\d{1,3}(?:[.,]\d)?\s*)?(?:[°º˚*'"”’o]|deg(?:rees?|\.)?)?\s*(F(?:ahrenheit)?|C(?:elsius|entigrade)?)(?![\p{L}\d])/giu;
+  /(?<![\d.,/]|\d[-–])(\d{2,4}(?:[.,]\d)?|[1-2][.,]\d{3}(?![\d])|\d{4}0(?=\s?[FC]\b))\s*(?:(?:[+/]*[±+][/\-]*|\+\s*\/\s*-)\s*\d{1,3}(?:[.,]\d)?\s*)?(?:[°º˚*'"”’o]|deg(?:rees?|\.)?)?\s*(F(?:ahrenheit)?|C(?:elsius|entigrade)?)(?![\p{L}\d]|\s+of\b)/giu;
 
 /** Temperatures with their unit; the tolerance that may stand between is passed over. */
 export function temperaturesIn(text: string, sign: DecimalSign): FoundTemperature[] {

@@ -1,7 +1,7 @@
 import { findSpecifications } from '../../../trade/lineage/recognise-specification';
 import { boxAround } from '../../layout/box';
 import { passageFrom, spotIn, type Passage, type Spot } from '../../layout/passage';
-import { TRUST, widestFirst } from './answers';
+import { TRUST, widestFirst, type Answer } from './answers';
 import { daysIn } from './dates';
 import type { LabelKey } from './labels';
 import type { Paper } from './paper';
@@ -91,6 +91,8 @@ const SAID: Record<ReadingKind, RegExp> = {
   coating_weight: /\b(?:coating|film) weight\b/iu,
 };
 
+const NUMBERS = String.raw`\d+(?:[.,]\d+)?(?:\s*[,;/|&]\s*\d+(?:[.,]\d+)?)*`;
+
 const KINDS = Object.keys(UNITS) as ReadingKind[];
 const isKind = (key: LabelKey): key is ReadingKind & LabelKey => (KINDS as string[]).includes(key);
 
@@ -98,11 +100,13 @@ const isKind = (key: LabelKey): key is ReadingKind & LabelKey => (KINDS as strin
 export function readReadings(paper: Paper): ReadReading[] {
   const asked: (ReadReading & { readonly group: string })[] = [];
   for (const answer of paper.answers) {
-    if (!isKind(answer.key) || answer.also.includes('requirement')) continue;
-    const kind = answer.key;
+    const kind = kindAsked(answer);
+    if (kind === null) continue;
+    const isLimit = answer.also.includes('requirement');
     const values = widestFirst(answer);
-    for (const { passage, how } of values) {
-      const found = valuesIn(passage, kind, `${answer.qualifier} ${answer.words}`, paper.decimal);
+    for (const { passage: whole, how } of values) {
+      const passage = isLimit ? behindFound(whole) : whole;
+      const found = passage && valuesIn(passage, kind, `${answer.qualifier} ${answer.words}`, paper.decimal);
       if (!found) continue;
       const group = answer.row?.split('.').slice(0, 2).join('.') ?? '';
       asked.push({ kind, ...found, trust: TRUST[how], group });
@@ -111,7 +115,54 @@ export function readReadings(paper: Paper): ReadReading[] {
   }
   const kinds = new Set(asked.map(({ kind }) => kind));
   const said = paper.paragraphs.flatMap((paragraph) => inSentences(paragraph, paper, kinds));
-  return merged([...asked, ...said]);
+  const sure = new Set([...kinds, ...said.map(({ kind }) => kind)]);
+  const bare = paper.paragraphs.flatMap((paragraph) => besideUnit(paragraph, paper, sure));
+  return merged([...asked, ...said, ...bare]);
+}
+
+/** "Required 84 HRB min.; found 87, 88": what was found. Null where nothing says that it was. */
+function behindFound(passage: Passage): Passage | null {
+  const match = /\b(?:found|actuals?|results?|achieved|measured|obtained|observed|ist)\b\W*/iu.exec(
+    passage.text,
+  );
+  return match && passageFrom(passage, match.index + match[0].length);
+}
+
+/** What the label asks for; a column of results says it by its unit alone. */
+function kindAsked({ key, qualifier }: Answer): ReadingKind | null {
+  if (isKind(key)) return key;
+  if (key !== 'result') return null;
+  return (
+    (['hardness', 'conductivity', 'thickness'] as const).find((kind) =>
+      UNITS[kind].some(({ name, pattern }) => name !== 'in' && name !== 'mm' && pattern.test(qualifier)),
+    ) ?? null
+  );
+}
+
+const UNIT_TELLS: readonly (readonly [ReadingKind, RegExp])[] = [
+  [
+    'hardness',
+    new RegExp(
+      String.raw`(?<![\p{L}\d.])(?:HR[A-H]\s*:?\s*${NUMBERS}|${NUMBERS}\s*HR[A-H])(?![\p{L}\d.])`,
+      'iu',
+    ),
+  ],
+  ['conductivity', new RegExp(String.raw`(?<![\p{L}\d.])${NUMBERS}\s*%?\s*IACS`, 'iu')],
+];
+
+/** Figures whose unit says of itself what they are of: "30.4 / 30.6 % IACS". */
+function besideUnit(
+  passage: Passage,
+  paper: Paper,
+  known: ReadonlySet<ReadingKind>,
+): (ReadReading & { group: string })[] {
+  return UNIT_TELLS.flatMap(([kind, pattern]) => {
+    const match = known.has(kind) ? null : pattern.exec(withoutLimits(passage.text, kind));
+    const found =
+      match &&
+      valuesIn(passageFrom(passage, match.index, match.index + match[0].length), kind, '', paper.decimal);
+    return found ? [{ kind, ...found, trust: 0.6, group: '' }] : [];
+  });
 }
 
 /** Readings of one kind and unit are one series: rows of a table, places of a form. The same series twice is once. */
@@ -154,6 +205,15 @@ const LIMITS: readonly RegExp[] = [
   /\d+\s*(?:readings?|places?|pcs?|pieces?|samples?|specimens?|tests?|kgf?|kg|gf|g|kHz|measurements?|locations?|parts?)\b/giu,
 ];
 
+/** Only inches are written so, with nothing before the point. */
+const IN_INCHES = /(?<![\d.])\.00\d/;
+
+const STATISTICS: readonly RegExp[] = [
+  /\bmin(?:imum)?\.?\s*[:=]?\s*\d*\.?\d/iu,
+  /\bmax(?:imum)?\.?\s*[:=]?\s*\d*\.?\d/iu,
+  /\b(?:avg|average|mean|mittel\w*|moy(?:enne)?|ø)\.?\s*[:=]?\s*\d*\.?\d/iu,
+];
+
 function valuesIn(
   passage: Passage,
   kind: ReadingKind,
@@ -164,7 +224,10 @@ function valuesIn(
   const unit =
     UNITS[kind].find(({ pattern }) => pattern.test(text)) ??
     UNITS[kind].find(({ pattern }) => pattern.test(about)) ??
-    UNITS[kind].find(({ pattern }) => pattern.test(passage.text));
+    UNITS[kind].find(({ pattern }) => pattern.test(passage.text)) ??
+    (kind === 'thickness' && IN_INCHES.test(text)
+      ? UNITS.thickness.find(({ name }) => name === 'in')
+      : undefined);
   const figures = new RegExp(
     sign === ','
       ? String.raw`(?<![\p{L}\d.,])\d+(?:[.,]\d+)?`
@@ -203,8 +266,15 @@ function withoutLimits(text: string, kind: ReadingKind): string {
   };
   for (const { at, length } of findSpecifications(plain)) blank(at, at + length);
   for (const { start, end } of daysIn(plain)) blank(start, end);
+  if (kind !== 'conductivity')
+    for (const match of plain.matchAll(new RegExp(String.raw`(?<![\p{L}\d.])${NUMBERS}\s*%?\s*IACS`, 'giu')))
+      blank(match.index, match.index + match[0].length);
   if (kind !== 'hardness')
     for (const match of plain.matchAll(/HR[A-Z0-9]{1,3}\s?\d+(?:[.,]\d+)?/g))
+      blank(match.index, match.index + match[0].length);
+  // Least, most and mean together are what was measured, without the mean.
+  if (STATISTICS.every((pattern) => pattern.test(plain)))
+    for (const match of plain.matchAll(/\b(?:min|max)(?:imum)?\.?\s*[:=]?\s*(?=[\d.])/giu))
       blank(match.index, match.index + match[0].length);
   for (const pattern of LIMITS) {
     for (const match of plain.matchAll(pattern)) blank(match.index, match.index + match[0].length);

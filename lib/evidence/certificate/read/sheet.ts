@@ -4,6 +4,7 @@ import { joined, passageFrom, spotIn, type Passage, type Spot } from '../../layo
 import type { Table } from '../../layout/tables';
 import type { Mark, Page } from '../../page';
 import { labelAtStart, labelsIn, type FoundLabel } from './find-labels';
+import type { LabelKey } from './labels';
 import { labelledTables } from './labelled-tables';
 import { stepsIn, type Step } from './steps';
 
@@ -16,6 +17,8 @@ export interface Asked {
   readonly values: readonly AskedValue[];
   /** Reading order over the whole certificate. */
   readonly order: number;
+  /** What stands before the label in the same place. */
+  readonly before: string;
 }
 
 export interface AskedValue {
@@ -92,8 +95,16 @@ function askedOn(lines: readonly Line[], tables: readonly Table<FoundLabel>[], p
         const spot = spotIn(segment, label.start, label.end);
         if (!spot) return;
         const values = valuesOf({ label, until, segment, place, index, lines, labelled });
-        const section = sectionOf(lines, index, segment);
-        asked.push({ label, spot, section, values, order: page * 1e6 + index * 1000 + place * 10 + turn });
+        const section = sectionBeside(lines, index, segment, row.slice(0, place)) ?? null;
+        const before = segment.text.slice(0, label.start);
+        asked.push({
+          label,
+          spot,
+          section,
+          values,
+          before,
+          order: page * 1e6 + index * 1000 + place * 10 + turn,
+        });
       });
     });
   });
@@ -117,6 +128,8 @@ function valuesOf(where: Place): AskedValue[] {
   const right = last ? toTheRight(where) : [];
   const below = last ? belowIt(where) : null;
   const values: AskedValue[] = [];
+  // "N/A" is an answer: nothing that stands further on is one.
+  if (NOTHING.test(same.text) || (same.text.trim() === '' && NOTHING.test(right[0]?.text ?? ''))) return [];
   if (/[\p{L}\p{N}]/u.test(same.text)) {
     values.push({ passage: same, how: 'same' });
     if (right.length > 0) values.push({ passage: joined([same, ...right]), how: 'line' });
@@ -130,23 +143,37 @@ function valuesOf(where: Place): AskedValue[] {
   if (below) {
     const value: AskedValue = { passage: below, how: 'below' };
     // Without a colon a label looks down first where its neighbour is no value but stands in another column's row.
-    if (next && !label.marked && startsLevel(segment, below) && !closeBy(segment, next))
+    if (
+      next &&
+      !label.marked &&
+      startsLevel(segment, below) &&
+      !closeBy(segment, next) &&
+      !(/\d/.test(next.text) && !/\d/.test(below.text))
+    )
       values.unshift(value);
     else values.push(value);
   }
   return values;
 }
 
+const NOTHING = /^[\s:]*(?:n\.?\/?a\.?|not applicable|none|-{1,3}|—)\s*$/i;
+
 const startsLevel = ({ box }: Segment, below: Segment): boolean =>
   Math.abs(box[0] - below.box[0]) < 3 && below.box[1] - box[3] < 0.9 * heightOf(below.box);
 
 const closeBy = ({ box }: Segment, next: Segment): boolean => next.box[0] - box[2] < 4 * heightOf(box);
 
+/** A label and a figure for it in one place; least and most belong to the readings before them. */
+const saysValue = ({ start, end, words }: FoundLabel, text: string): boolean =>
+  start < 4 && !/^(?:min|max)/.test(words) && /\d/.test(text.slice(end));
+
 /** What follows on the line, up to the next label. */
-function toTheRight({ labelled, index, place }: Place): Segment[] {
+function toTheRight({ label, labelled, index, place }: Place): Segment[] {
   const following: Segment[] = [];
-  for (const { segment, isLabel } of (labelled[index] ?? []).slice(place + 1)) {
-    if (isLabel) break;
+  for (const { segment, labels, isLabel } of (labelled[index] ?? []).slice(place + 1)) {
+    // A label with its value in one place, without a colon: "Delay 7 s".
+    const [first] = labels;
+    if (isLabel || (first && first.key !== label.key && saysValue(first, segment.text))) break;
     if (/[\p{L}\p{N}]/u.test(segment.text)) following.push(segment);
   }
   return following;
@@ -175,11 +202,38 @@ function belowIt({ segment, index, lines, labelled }: Place): Segment | null {
   return null;
 }
 
+/** What is asked of a step left of a label on its line is asked of the label's step too, when its heading is nearer. */
+function sectionBeside(
+  lines: readonly Line[],
+  index: number,
+  segment: Segment,
+  left: readonly Labelled[],
+): Step | null {
+  const own = headingAbove(lines, index, segment);
+  const beside = left
+    .filter(({ labels }) => labels.some(({ key }) => OF_A_STEP.has(key)))
+    .map((one) => headingAbove(lines, index, one.segment))
+    .reduce((near, one) => (one.line > near.line ? one : near), own);
+  return beside.step;
+}
+
+const OF_A_STEP: ReadonlySet<LabelKey> = new Set(['temperature', 'minutes', 'time_in', 'time_out', 'date']);
+
 /** The step that the nearest heading above speaks of. */
-function sectionOf(lines: readonly Line[], index: number, segment: Segment): Step | null {
+const sectionOf = (lines: readonly Line[], index: number, segment: Segment): Step | null =>
+  headingAbove(lines, index, segment).step;
+
+interface HeadingAbove {
+  readonly step: Step | null;
+  /** Index of its line; -1 where there is none. */
+  readonly line: number;
+}
+
+function headingAbove(lines: readonly Line[], index: number, segment: Segment): HeadingAbove {
   for (let above = index; above >= 0; above -= 1) {
     const line = lines[above];
-    if (!line) continue;
+    // A choice of processes is no heading.
+    if (!line || line.segments.filter(({ text }) => stepsIn(text).length > 0).length > 2) continue;
     for (const other of line.segments) {
       if (other === segment || !isHeading(other, line, above === index ? segment : null)) continue;
       if (answersLabel(other, line)) continue;
@@ -187,11 +241,11 @@ function sectionOf(lines: readonly Line[], index: number, segment: Segment): Ste
       if (beside) continue;
       const steps = stepsIn(other.text);
       const [step] = steps;
-      if (step) return steps.length === 1 ? step.step : null;
-      if (line.segments.length === 1) return null;
+      if (step) return { step: steps.length === 1 ? step.step : null, line: above };
+      if (line.segments.length === 1) return { step: null, line: above };
     }
   }
-  return null;
+  return { step: null, line: -1 };
 }
 
 /** Words right of a label are its value: the name of a process says what the certificate is of, not where a part begins. */
@@ -241,6 +295,13 @@ function runsOn(last: Line, line: Line): boolean {
   const prose = last.segments.length <= 2 && words >= 5;
   const [first] = line.segments;
   const label = first ? labelAtStart(first.text) : null;
+  const before = labelAtStart(last.segments[0]?.text ?? '');
+  // Fields and items of a list, each with a label before it.
+  const goesOn = /(?:[,;:–-]|\b(?:and|or|of|the|to|at|on|in|by|per|under|its|our|your|no\.?))$/i.test(
+    last.segments[last.segments.length - 1]?.text ?? '',
+  );
+  if (!goesOn && label && before) return false;
+  if (line.segments.length > 2) return false;
   const listed = /^\s*(?:[-–•*·]|\d{1,2}[.)])\s/.test(first?.text ?? '');
   return (
     close &&

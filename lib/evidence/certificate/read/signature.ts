@@ -14,7 +14,7 @@ export interface ReadSignature {
 }
 
 const SIGNED_IN_WORDS =
-  /(?:^|\s)\/\s?s\s?\/|(?:^|\s)gez\.\s+\p{Lu}|(?:electronically|digitally|elektronisch|num[eé]riquement)\s+(?:signed|approved|authenticated|certified|unterzeichnet|unterschrieben|sign[eé]e?)|\be-?signed\b|(?:signed|approved|signature)\s+(?:electronically|digitally)|electronic signature\s*(?:of|by|:)\s*\p{L}/iu;
+  /(?:^|\s)\/\s?s\s?\/|(?:^|\s)gez\.\s+\p{Lu}|(?:electronically|digitally|elektronisch|num[eé]riquement)\s+(?:signed|approved|authenticated|certified|authorized|authorised|released|unterzeichnet|unterschrieben|sign[eé]e?)|\be-?signed\b|(?:signed|approved|signature|released|authorized|authorised)\s+(?:electronically|digitally)|sign[eé]e?\s+(?:[eé]lectroniquement|num[eé]riquement)|firmado\s+(?:electr[oó]nicamente|digitalmente)|firmato\s+digitalmente|(?:elektronisch|digital(?:t)?)\s+(?:freigegeben|ondertekend|signert|signeret|signerad)|(?:electronic|digital|e-?)\s*signature\s*(?:of|by|:|-)\s*\p{L}|signature on file|\((?:electronic(?:ally)?|digital|e-?)\s*sign(?:ature|ed)\)|\(signed\)|(?:signert|signeret|signerad|ondertekend)\s+(?:elektronisk|digitalt|elektronisch|digitaal)/iu;
 const UNSIGNED =
   /not\s+(?:electronically\s+)?signed|signature not required|valid without (?:a )?signature|ohne unterschrift g[uü]ltig/iu;
 
@@ -44,6 +44,8 @@ export function readSignature(paper: Paper): ReadSignature {
     const scrawl = scrawlAt(paper, place);
     if (scrawl) return { present: true, spot: scrawl, belief: 0.8 };
   }
+  const script = scriptedName(paper);
+  if (script) return { present: true, spot: script, belief: 0.85 };
   const loose = places.length === 0 ? looseStroke(paper) : null;
   if (loose) return { present: true, spot: loose, belief: 0.7 };
   const [place] = places;
@@ -97,6 +99,34 @@ function scrawlAt(paper: Paper, { label, page }: Answer): Spot | null {
       );
       if (inside && unsure && widthOf(segment.box) > 25) return spotIn(segment, 0, segment.text.length);
     }
+  return null;
+}
+
+/** How much larger than the other words of a page a name is that stands there as a signature. */
+const SCRIPT = 1.45;
+
+/** A name in the large letters that a word processor signs with, which stands in print beside or below once more. */
+function scriptedName(paper: Paper): Spot | null {
+  for (const sheet of paper.sheets) {
+    const segments = sheet.lines.flatMap((line) => line.segments);
+    const heights = segments.map(({ box }) => heightOf(box)).sort((a, b) => a - b);
+    const usual = heights[Math.floor(heights.length / 2)] ?? 10;
+    const found = segments.find((segment) => {
+      const name = segment.text.toLowerCase();
+      const twin = (other: Passage & { readonly box: Box }): boolean =>
+        other !== segment &&
+        other.text.toLowerCase().includes(name) &&
+        heightOf(segment.box) > 1.25 * heightOf(other.box) &&
+        Math.abs(other.box[1] - segment.box[1]) < 90;
+      return (
+        heightOf(segment.box) > SCRIPT * usual &&
+        segment.box[1] > 0.2 * sheet.height &&
+        NAME.test(segment.text) &&
+        segments.some(twin)
+      );
+    });
+    if (found) return spotIn(found, 0, found.text.length);
+  }
   return null;
 }
 

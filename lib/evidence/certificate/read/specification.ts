@@ -44,12 +44,20 @@ function fromAnswer(paper: Paper, answer: Answer): Candidate<SpecificationRead>[
     const candidates = found.flatMap((one, index) => {
       const trust = (answer.key === 'specification' ? 1 : 0.85) * TRUST[how] * (index === 0 ? 1 : 0.7);
       const read = readOf(one);
-      const revision = read.revision ?? (index === 0 ? revisionBeside(paper, answer) : null);
+      const behind = behindStroke(passage.text, one, answer.also.includes('specification_revision'));
+      const revision = read.revision ?? behind ?? (index === 0 ? revisionBeside(paper, answer) : null);
       return candidate({ ...read, revision }, one, passage, trust);
     });
     if (candidates.length > 0) return candidates;
   }
   return [];
+}
+
+/** "AMS 2759/11 / D"; without room around the stroke only where the revision is asked for too. */
+function behindStroke(text: string, { at, length }: FoundSpecification, asked: boolean): string | null {
+  const [, room = '', revision = null] =
+    /^(\s*)\/\s*([A-Z]|\d{2}[a-z]?)(?![\p{L}\d])/u.exec(text.slice(at + length)) ?? [];
+  return asked || room !== '' ? revision : null;
 }
 
 /** A label or column "Rev" that goes with this specification and not with a part. */

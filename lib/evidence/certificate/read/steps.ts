@@ -17,7 +17,7 @@ export type Step =
 const SAID: readonly (readonly [Step, string])[] = [
   [
     'embrittlement_relief',
-    String.raw`(?:post[- ]plat(?:e|ing) )?(?:hydrogen |h\.? ?e\.? )?(?:de-?)?embritt(?:le)?(?:ment|ling)?(?: relief| relieved?| relieving)?(?: bak(?:e|ed|ing))?|h\.?e\.? (?:relief|bake)(?: bake)?|(?:post[- ]plat(?:e|ing) )?bak(?:e|ed|ing)(?: for (?:hydrogen )?embrittlement relief)?|(?:wasserstoff)?entspr[oö]d\w*|d[eé]gazage|hydrogen relief(?: bake)?`,
+    String.raw`(?:post[- ]plat(?:e|ing) )?(?:hydrogen |h\.? ?e\.? )?(?:de-?)?embritt(?:le)?(?:ment|ling|led|d)?(?: relief| relieved?| relieving)?(?: bak(?:e|ed|ing))?|h\.?e\.? (?:relief|bake)(?: bake)?|(?:post[- ]plat(?:e|ing) )?bak(?:e|ed|ing)(?: for (?:hydrogen )?embrittlement relief)?|(?:wasserstoff)?entspr[oö]d\w*|d[eé]gazage|deshidrogenad[oa]|deidrogenazione|deshydrog[eé]nation|d[eé]shydrog[eé]nation|hydrogen bake|hydrogen relief(?: bake)?`,
   ],
   [
     'stress_relief',
@@ -29,16 +29,16 @@ const SAID: readonly (readonly [Step, string])[] = [
   ],
   [
     'artificial_age',
-    String.raw`art(?:ificial(?:ly)?|\.)[- ]*ag(?:e|ed|e?ing)|precipitation(?: heat[- ]?treat(?:ed|ment|ing)?|[- ]harden(?:ed|ing)?| treatment| ag(?:e|ed|e?ing))?|age[- ]?harden(?:ed|ing)?|ag(?:e|ed|e?ing)|warmausl\w*|vieillissement artificiel|vieillissement|envejecimiento`,
+    String.raw`art(?:ificial(?:ly)?|\.)[- ]*ag(?:e|ed|e?ing)|precipitation(?: heat[- ]?treat(?:ed|ment|ing)?|[- ]harden(?:ed|ing)?| treatment| ag(?:e|ed|e?ing))?|age[- ]?harden(?:ed|ing)?|p\.?h\.?t\.?|ppt\.? ag(?:e|ed|e?ing)|precip\.?(?: h\.?t\.?| ag(?:e|ed|e?ing)| treat(?:ed|ment)?)?|ag(?:e|ed|e?ing)|warmausl\w*|vieillissement artificiel|vieillissement|envejecimiento`,
   ],
   [
     'solution',
-    String.raw`sol(?:utio)?n\.?(?:[- ]?heat)?[- ]?treat(?:ed|ment|ing)?|solution[- ](?:heat|anneal(?:ed)?|annealing)|solutioni[sz](?:e|ed|ing)|solution|s\.?h\.?t\.?|l[oö]sungsgl[uü]h\w*|mise en solution|solubilizaci[oó]n`,
+    String.raw`sol(?:utio)?n\.?(?:[- ]?heat)?[- ]?treat(?:ed|ment|ing)?|solution[- ](?:heat|anneal(?:ed)?|annealing)|solutioni[sz](?:e|ed|ing)|solution|sol(?:utio)?n?\.?[- ]h\.?t\.?|sol\.[- ]?treat(?:ed|ment|ing)?|sol\. ?(?:h\.?t\.?|&|\+)|soln\.?|s\.?h\.?t\.?|l[oö]sungsgl[uü]h\w*|mise en solution|solubilizaci[oó]n`,
   ],
   ['normalize', String.raw`normali[sz](?:e|ed|ing)|normalgl[uü]h\w*|normalisation`],
   [
     'austenitize',
-    String.raw`austeniti[sz](?:e|ed|ing)|austeniti[sz]ation|harden(?:ed|ing)?|h[aä]rten|aust[eé]nitisation|austenitizado|temple`,
+    String.raw`aust(?:eniti[sz](?:e|ed|ing)|eniti[sz]ation|enit\.|\.)?(?=[\s:.,]|$)|austenitizaci[oó]n|harden(?:ed|ing)?|h[aä]rten|aust[eé]nitisation|austenitizado|temple`,
   ],
   [
     'temper',
