@@ -1,12 +1,16 @@
 import type { Told } from './content';
 import type { Paper } from './sheet-of-paper';
+import type { Truth } from './story';
+import type { House } from './wording';
 
 /** How a house sets out its certificates. */
 export interface Layout {
   readonly name: string;
-  readonly hand: 'american' | 'british' | 'german' | 'french';
+  readonly hand: House;
   /** Plain text: there is nothing to scan. */
   readonly textOnly?: true;
+  /** What the house puts on paper of what was done; all of it where this is missing. What it leaves out is null. */
+  states?(truth: Truth): Truth;
   draw(told: Told): Promise<Uint8Array>;
 }
 

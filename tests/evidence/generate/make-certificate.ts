@@ -2,14 +2,15 @@ import { PDFDocument } from 'pdf-lib';
 import { photographPage } from '../degrade/photograph-page';
 import { renderPages } from '../degrade/render-page';
 import { scanPage } from '../degrade/scan-page';
-import { asJpeg, asScannedPdf } from '../degrade/write-files';
+import type { Raster } from '../degrade/raster';
+import { asJpeg, asScannedPdf, asTiff } from '../degrade/write-files';
 import { asPrinted } from './as-printed';
 import type { Told } from './content';
 import { diceOf, type Dice } from './dice';
 import type { Layout } from './layout';
 import { plantIn } from './plant';
 import { tellStory, type Story, type Truth } from './story';
-import { americanHand, europeanHand, type Hand } from './wording';
+import { handOf } from './wording';
 
 export const KINDS = ['text', 'scan', 'scan150', 'photo'] as const;
 export type Kind = (typeof KINDS)[number];
@@ -65,10 +66,14 @@ export async function makeCertificate(
 }
 
 function tell(layout: Layout, dice: Dice, count: number): { told: Told; planted: string[] } {
-  const language = ({ american: 'en', british: 'en', german: 'de', french: 'fr' } as const)[layout.hand];
-  const hand: Hand = layout.hand === 'american' ? americanHand(dice) : europeanHand(dice, language);
-  const { story, planted } = plantIn(tellStory(dice), dice, count);
-  return { told: { story: asPrinted(story, hand, dice), hand, dice }, planted };
+  const hand = handOf(layout.hand, dice);
+  const states = layout.states?.bind(layout);
+  const { story, planted } = plantIn(tellStory(dice), dice, { count, states });
+  const printed = asPrinted(story, hand, dice);
+  return {
+    told: { story: { ...printed, truth: states?.(printed.truth) ?? printed.truth }, hand, dice },
+    planted,
+  };
 }
 
 async function together(files: readonly Uint8Array[]): Promise<Uint8Array> {
@@ -98,20 +103,8 @@ async function onFilm(
   if (kind === 'text')
     return { bytes: pdf, name: `${seed}.pdf`, pages: (await PDFDocument.load(pdf)).getPageCount() };
   const rendered = await renderPages(pdf);
-  const [front] = rendered;
-  if (kind === 'photo' && rendered.length === 1 && front) {
-    const photograph = await photographPage(front, {
-      seed,
-      longerSide: dice.pick([2800, 3200, 3600]),
-      perspective: dice.pick([0.2, 0.5, 0.8]),
-      unevenLight: dice.pick([0.3, 0.6]),
-      blur: dice.pick([0.3, 0.6]),
-      turned: 0,
-      desk: dice.pick(['dark', 'wood', 'light'] as const),
-    });
-    return { bytes: await asJpeg(photograph), name: `${seed}.jpg`, pages: 1 };
-  }
-  const dpi: 150 | 200 | 300 = kind === 'scan150' || kind === 'photo' ? 150 : dice.pick([200, 300] as const);
+  if (kind === 'photo') return photographed(rendered, seed, dice);
+  const dpi: 150 | 200 | 300 = kind === 'scan150' ? 150 : dice.pick([200, 300] as const);
   const settings = {
     seed,
     dpi,
@@ -123,4 +116,29 @@ async function onFilm(
   };
   const scans = await Promise.all(rendered.map((page) => scanPage(page, settings)));
   return { bytes: await asScannedPdf(scans), name: `${seed}.pdf`, pages: rendered.length };
+}
+
+/** One page as a JPEG; several, page after page by the same hand and light, as a PDF or a TIFF of photographs. */
+async function photographed(
+  rendered: readonly Raster[],
+  seed: number,
+  dice: Dice,
+): Promise<{ bytes: Uint8Array; name: string; pages: number }> {
+  const settings = {
+    longerSide: dice.pick([2800, 3200, 3600]),
+    perspective: dice.pick([0.2, 0.5, 0.8]),
+    unevenLight: dice.pick([0.3, 0.6]),
+    blur: dice.pick([0.3, 0.6]),
+    turned: 0,
+    desk: dice.pick(['dark', 'wood', 'light'] as const),
+  } as const;
+  const photographs: Raster[] = [];
+  for (const [index, page] of rendered.entries())
+    photographs.push(await photographPage(page, { ...settings, seed: seed + 1000 * index }));
+  const [first] = photographs;
+  const pages = photographs.length;
+  if (pages === 1 && first) return { bytes: await asJpeg(first), name: `${seed}.jpg`, pages };
+  return dice.chance(0.5)
+    ? { bytes: await asScannedPdf(photographs), name: `${seed}.pdf`, pages }
+    : { bytes: await asTiff(photographs), name: `${seed}.tif`, pages };
 }

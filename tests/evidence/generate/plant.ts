@@ -118,11 +118,19 @@ const PLANTS: Readonly<Record<string, Plant>> = {
 };
 
 /**
- * Plants up to so many discrepancies, no two on the same field.
+ * Plants up to so many discrepancies, no two on the same field, and none that the house would not print.
  *
  * @returns the story as its certificate then states it, with the codes in `planted`.
  */
-export function plantIn(story: Story, dice: Dice, count: number): { story: Story; planted: string[] } {
+export function plantIn(
+  story: Story,
+  dice: Dice,
+  {
+    count,
+    states = (truth) => truth,
+  }: { readonly count: number; readonly states?: ((truth: Truth) => Truth) | undefined },
+): { story: Story; planted: string[] } {
+  const shown = (truth: Truth): string => JSON.stringify(states(truth));
   let current = story;
   const planted: string[] = [];
   const alone = new Set([
@@ -141,7 +149,7 @@ export function plantIn(story: Story, dice: Dice, count: number): { story: Story
     if (planted.includes('bake_too_short') && code === 'bake_started_late') continue;
     if (/^dated/.test(code) && planted.some((one) => /^dated/.test(one))) continue;
     const truth = PLANTS[code]?.(current, dice) ?? null;
-    if (truth === null) continue;
+    if (truth === null || shown(truth) === shown(current.truth)) continue;
     current = { ...current, truth };
     planted.push(code);
   }

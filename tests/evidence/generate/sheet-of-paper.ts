@@ -2,10 +2,11 @@ import { PDFDocument, rgb, StandardFonts, type PDFFont, type PDFPage } from 'pdf
 
 export type Face = 'Helvetica' | 'Times' | 'Courier';
 
-const FACES: Record<Face, readonly [StandardFonts, StandardFonts]> = {
-  Helvetica: [StandardFonts.Helvetica, StandardFonts.HelveticaBold],
-  Times: [StandardFonts.TimesRoman, StandardFonts.TimesRomanBold],
-  Courier: [StandardFonts.Courier, StandardFonts.CourierBold],
+/** Plain, bold, and the slanted one that word processors offer for signing. */
+const FACES: Record<Face, readonly [StandardFonts, StandardFonts, StandardFonts]> = {
+  Helvetica: [StandardFonts.Helvetica, StandardFonts.HelveticaBold, StandardFonts.TimesRomanItalic],
+  Times: [StandardFonts.TimesRoman, StandardFonts.TimesRomanBold, StandardFonts.TimesRomanItalic],
+  Courier: [StandardFonts.Courier, StandardFonts.CourierBold, StandardFonts.TimesRomanItalic],
 };
 
 type Point = readonly [number, number];
@@ -13,6 +14,7 @@ type Point = readonly [number, number];
 export interface TextStyle {
   readonly size?: number;
   readonly bold?: boolean;
+  readonly slanted?: boolean;
   readonly align?: 'left' | 'centre' | 'right';
   readonly grey?: number;
 }
@@ -26,7 +28,7 @@ export class Paper {
 
   private constructor(
     private readonly document: PDFDocument,
-    private readonly fonts: readonly [PDFFont, PDFFont],
+    private readonly fonts: readonly [PDFFont, PDFFont, PDFFont],
     [width, height]: Point,
     readonly size: number,
   ) {
@@ -40,10 +42,10 @@ export class Paper {
     const when = new Date('2026-01-01T00:00:00Z');
     document.setCreationDate(when);
     document.setModificationDate(when);
-    const [plain, bold] = FACES[face];
+    const [plain, bold, slanted] = FACES[face];
     return new Paper(
       document,
-      [await document.embedFont(plain), await document.embedFont(bold)],
+      [await document.embedFont(plain), await document.embedFont(bold), await document.embedFont(slanted)],
       [width, height],
       size,
     );
@@ -54,38 +56,62 @@ export class Paper {
     this.y = 40;
   }
 
-  widthOf(text: string, { size = this.size, bold = false }: TextStyle = {}): number {
-    return this.fonts[bold ? 1 : 0].widthOfTextAtSize(text, size);
+  private fontOf({ bold = false, slanted = false }: TextStyle): PDFFont {
+    if (slanted) return this.fonts[2];
+    return this.fonts[bold ? 1 : 0];
+  }
+
+  widthOf(text: string, style: TextStyle = {}): number {
+    return this.fontOf(style).widthOfTextAtSize(text, style.size ?? this.size);
   }
 
   /** Text whose letters stand on `y`. */
   text(text: string, x: number, y: number, style: TextStyle = {}): void {
-    const { size = this.size, bold = false, align = 'left', grey = 0 } = style;
+    const { size = this.size, align = 'left', grey = 0 } = style;
     const wide = this.widthOf(text, style);
     const left = { left: x, right: x - wide, centre: x - wide / 2 }[align];
     this.page.drawText(text, {
       x: left,
       y: this.height - y,
       size,
-      font: this.fonts[bold ? 1 : 0],
+      font: this.fontOf(style),
       color: rgb(grey, grey, grey),
+    });
+  }
+
+  /** Letters set apart one by one, as headings are. */
+  spaced(text: string, x: number, y: number, style: TextStyle & { readonly gap: number }): void {
+    const wide = [...text].reduce((sum, letter) => sum + this.widthOf(letter, style) + style.gap, -style.gap);
+    let at = { left: x, right: x - wide, centre: x - wide / 2 }[style.align ?? 'left'];
+    for (const letter of text) {
+      if (letter !== ' ') this.text(letter, at, y, { ...style, align: 'left' });
+      at += this.widthOf(letter, style) + style.gap;
+    }
+  }
+
+  /** The lines that a text breaks into within a width; a line break in it stays one. */
+  linesOf(text: string, width: number, style: TextStyle = {}): string[] {
+    return text.split('\n').flatMap((paragraph) => {
+      const lines: string[] = [];
+      let line = '';
+      for (const word of paragraph.split(' ')) {
+        const longer = line === '' ? word : `${line} ${word}`;
+        if (this.widthOf(longer, style) > width && line !== '') {
+          lines.push(line);
+          line = word;
+        } else line = longer;
+      }
+      return [...lines, line];
     });
   }
 
   /** Text broken into lines; moves down. */
   prose(text: string, x: number, width: number, style: TextStyle = {}): void {
     const size = style.size ?? this.size;
-    let line = '';
-    for (const word of text.split(' ')) {
-      const longer = line === '' ? word : `${line} ${word}`;
-      if (this.widthOf(longer, style) > width && line !== '') {
-        this.text(line, x, this.y, style);
-        this.y += size * 1.3;
-        line = word;
-      } else line = longer;
+    for (const line of this.linesOf(text, width, style)) {
+      this.text(line, x, this.y, style);
+      this.y += size * 1.3;
     }
-    this.text(line, x, this.y, style);
-    this.y += size * 1.3;
   }
 
   rule([x1, y1]: Point, [x2, y2]: Point, thickness = 0.6): void {
@@ -107,6 +133,17 @@ export class Paper {
     });
   }
 
+  circle(x: number, y: number, radius: number): void {
+    this.page.drawEllipse({
+      x,
+      y: this.height - y,
+      xScale: radius,
+      yScale: radius,
+      borderWidth: 1,
+      borderColor: rgb(0.15, 0.15, 0.5),
+    });
+  }
+
   shade(x: number, y: number, width: number, height: number): void {
     this.page.drawRectangle({ x, y: this.height - y - height, width, height, color: rgb(0.9, 0.9, 0.9) });
   }
@@ -124,6 +161,12 @@ export class Paper {
       borderWidth: 1.2,
       borderColor: rgb(0.1, 0.1, 0.45),
     });
+  }
+
+  /** A signature kept as a picture and pasted in: its left bottom corner, and its size. */
+  async paste(png: Uint8Array, [x, y]: Point, [width, height]: Point): Promise<void> {
+    const picture = await this.document.embedPng(png);
+    this.page.drawImage(picture, { x, y: this.height - y, width, height });
   }
 
   save(): Promise<Uint8Array> {

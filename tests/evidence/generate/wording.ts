@@ -30,8 +30,24 @@ const parts = (iso: string): [string, string, string] => {
   return [year, month, day];
 };
 
+const ordinal = (day: number): string => {
+  const teen = day > 10 && day < 14;
+  return `${day}${(teen ? undefined : ['th', 'st', 'nd', 'rd'][day % 10]) ?? 'th'}`;
+};
+
 export const DAYS: Record<
-  'iso' | 'us' | 'usShort' | 'named' | 'military' | 'letter' | 'dotted' | 'british',
+  | 'iso'
+  | 'us'
+  | 'usShort'
+  | 'named'
+  | 'military'
+  | 'militaryLong'
+  | 'shortNamed'
+  | 'letter'
+  | 'ordinal'
+  | 'dotted'
+  | 'british'
+  | 'slashedIso',
   (iso: string) => string
 > = {
   iso: (iso) => iso,
@@ -40,6 +56,11 @@ export const DAYS: Record<
   named: (iso) => (([y, m, d]) => `${Number(d)} ${LONG[Number(m) - 1] ?? ''} ${y}`)(parts(iso)),
   military: (iso) =>
     (([y, m, d]) => `${d}-${(MONTHS[Number(m) - 1] ?? '').toUpperCase()}-${y.slice(2)}`)(parts(iso)),
+  militaryLong: (iso) =>
+    (([y, m, d]) => `${d}-${(MONTHS[Number(m) - 1] ?? '').toUpperCase()}-${y}`)(parts(iso)),
+  shortNamed: (iso) => (([y, m, d]) => `${d} ${MONTHS[Number(m) - 1] ?? ''} ${y}`)(parts(iso)),
+  ordinal: (iso) => (([y, m, d]) => `${LONG[Number(m) - 1] ?? ''} ${ordinal(Number(d))}, ${y}`)(parts(iso)),
+  slashedIso: (iso) => iso.replaceAll('-', '/'),
   letter: (iso) => (([y, m, d]) => `${LONG[Number(m) - 1] ?? ''} ${Number(d)}, ${y}`)(parts(iso)),
   dotted: (iso) => (([y, m, d]) => `${d}.${m}.${y}`)(parts(iso)),
   british: (iso) => (([y, m, d]) => `${d}/${m}/${y}`)(parts(iso)),
@@ -55,7 +76,7 @@ const TIMES: readonly ((clock: string) => string)[] = [
   },
 ];
 
-export function americanHand(dice: Dice): Hand {
+function americanHand(dice: Dice): Hand {
   return {
     day: dice.pick([DAYS.us, DAYS.usShort, DAYS.military, DAYS.iso, DAYS.letter]),
     time: dice.pick(TIMES),
@@ -65,7 +86,7 @@ export function americanHand(dice: Dice): Hand {
   };
 }
 
-export function europeanHand(dice: Dice, language: Hand['language']): Hand {
+function europeanHand(dice: Dice, language: Hand['language']): Hand {
   return {
     day: language === 'en' ? dice.pick([DAYS.british, DAYS.named]) : DAYS.dotted,
     time: TIMES[0] ?? ((clock) => clock),
@@ -73,6 +94,15 @@ export function europeanHand(dice: Dice, language: Hand['language']): Hand {
     unit: 'C',
     language,
   };
+}
+
+export type House = 'american' | 'british' | 'german' | 'french' | 'nordic';
+
+/** The hand of a house. */
+export function handOf(house: House, dice: Dice): Hand {
+  if (house === 'american') return americanHand(dice);
+  if (house === 'nordic') return { ...europeanHand(dice, 'en'), comma: true };
+  return europeanHand(dice, ({ british: 'en', german: 'de', french: 'fr' } as const)[house]);
 }
 
 export const moment = (hand: Hand, iso: string): string =>
