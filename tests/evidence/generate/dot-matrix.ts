@@ -20,7 +20,8 @@ export const dotMatrix: Layout = {
     const paper = await Paper.open('Courier', 9.2, [612, 792]);
     paper.y = 40;
     for (const line of linesOf(told)) {
-      paper.text(line.toUpperCase(), 48, paper.y);
+      // The capital of the micro sign is a Greek letter, which no printer had.
+      paper.text(line.toUpperCase().replaceAll('\u039C', 'µ'), 48, paper.y);
       paper.y += 11.5;
     }
     paper.y += 26;

@@ -68,9 +68,7 @@ export const operationsLog: Layout = {
               { label: "COND. AS REC'D", value: change.from },
               { label: 'COND. AS SHIPPED', value: change.to },
             ]
-          : truth.class_type === null
-            ? []
-            : [{ label: 'TYPE / CLASS', value: truth.class_type.toUpperCase(), share: 1.6 }]),
+          : [{ label: 'TYPE / CLASS', value: truth.class_type?.toUpperCase() ?? '', share: 1.6 }]),
       ],
     );
     paper.y += 8;

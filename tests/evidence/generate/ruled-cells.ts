@@ -86,7 +86,7 @@ export function fixedTable(
   across();
   if (rules === 'all' || rules === 'columns')
     for (const edge of edges) paper.rule([edge, top], [edge, paper.y]);
-  paper.y += paper.size;
+  paper.y += paper.size * 1.5;
 }
 
 /** A box to tick and what it stands for; gives back where the next one may begin. */
