@@ -42,7 +42,7 @@ const tidelineOf = (
   latenessBasis: Tideline['latenessBasis'] = 'latest_promise',
 ): Tideline => ({
   today: TODAY,
-  now: new Date('2026-04-16T17:00:00Z'),
+  now: '2026-04-16T17:00:00Z',
   zone: 'America/Los_Angeles',
   latenessBasis,
   lanes: [{ processorId: PROCESSOR, name: 'Galena Thermal', processes: [], approvedTo: null }],
