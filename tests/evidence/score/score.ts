@@ -7,10 +7,7 @@ import { HELD_OUT_LAYOUTS } from '../generate/held-out-layouts';
 import { SECOND_HELD_OUT_LAYOUTS } from '../generate/held-out-layouts-2';
 import { THIRD_HELD_OUT_LAYOUTS } from '../generate/held-out-layouts-3';
 import { FOURTH_HELD_OUT_LAYOUTS } from '../generate/held-out-layouts-4';
-<<<<<<< HEAD
-=======
 import { FIFTH_HELD_OUT_LAYOUTS } from '../generate/held-out-layouts-5';
->>>>>>> work-stranger
 import { LAYOUTS } from '../generate/layouts';
 import { KINDS, makeCertificate, type Kind, type MadeCertificate } from '../generate/make-certificate';
 import { judge } from './compare-with-truth';
@@ -20,11 +17,8 @@ import { Tally } from './tally';
  * Reads generated certificates and prints how well.
  *
  * `--kind text,scan,scan150,photo` which kinds of file; `--count 72` how many of each; `--from 0` the first seed;
-<<<<<<< HEAD
- * `--layouts usual|first|second|third|fourth` the layouts the rules were made with, or those written after them; `--verbose` names every field that was not read as it was written.
-=======
- * `--layouts usual|first|second|third|fourth|fifth` the layouts the rules were made with, or those written after them; `--verbose` names every field that was not read as it was written.
->>>>>>> work-stranger
+ * `--layouts usual|first|second|third|fourth|fifth` the layouts the rules were made with, or those written after them;
+ * `--verbose` names every field that was not read as it was written.
  */
 const { values: options } = parseArgs({
   options: {
@@ -42,10 +36,7 @@ const SETS = {
   second: SECOND_HELD_OUT_LAYOUTS,
   third: THIRD_HELD_OUT_LAYOUTS,
   fourth: FOURTH_HELD_OUT_LAYOUTS,
-<<<<<<< HEAD
-=======
   fifth: FIFTH_HELD_OUT_LAYOUTS,
->>>>>>> work-stranger
 } as const;
 const layouts = Object.entries(SETS).find(([name]) => name === options.layouts)?.[1] ?? LAYOUTS;
 const kinds = KINDS.filter((kind) => options.kind.split(',').includes(kind));
