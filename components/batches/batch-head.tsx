@@ -127,7 +127,7 @@ function Actions({ batch }: { batch: Batch }) {
       )}
       {mayReissue && <ButtonLink href={`/batches/${batch.id}/reissue`}>Re-issue</ButtonLink>}
       {isHere && mayDispatch && <Dispatch batch={batch} press={() => setOpen('dispatch')} />}
-      <DispatchDialog batch={batch} open={open === 'dispatch'} onClose={() => setOpen(null)} />
+      {isHere && <DispatchDialog batch={batch} open={open === 'dispatch'} onClose={() => setOpen(null)} />}
       <CancelDialog batch={batch} open={open === 'cancel'} onClose={() => setOpen(null)} />
     </>
   );

@@ -38,11 +38,11 @@ export default async function BatchPage({ params }: Props) {
         ask(getMeEndpoint, {}),
         ask(getBatchEndpoint, { batchId }),
         ask(getBatchLinesEndpoint, { batchId }),
-        ask(getBatchChecksEndpoint, { batchId }),
-        ask(getTravellerEndpoint, { batchId }),
         ask(listAuditEndpoint, historyOf('batch', batchId)),
         ...(dispatchedAt === null
           ? [
+              ask(getBatchChecksEndpoint, { batchId }),
+              ask(getTravellerEndpoint, { batchId }),
               ask(listStepProcessorsEndpoint, { process, specification: step.specification }),
               ask(getLoadPlanEndpoint, { batchId }),
             ]
