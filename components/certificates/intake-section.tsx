@@ -124,7 +124,7 @@ function IntakePaper({ row, mayAdd }: { row: IntakeRow; mayAdd: boolean }) {
             </Button>
           )}
           <span>{candidate.processor}.</span>
-          <span className="text-quiet">{candidate.reasons.join(', ')}</span>
+          <span className="text-quiet">{candidate.reasons.join(' ')}</span>
         </div>
       ))}
       {mayAdd &&
