@@ -34,7 +34,7 @@ export function BatchScreen({ batchId }: { batchId: string }) {
       {isHere ? (
         <Building batchId={batchId} isOpen={batch.cancelledAt === null} />
       ) : (
-        <Sent batchId={batchId} />
+        <Sent batchId={batchId} isCancelled={batch.cancelledAt !== null} />
       )}
     </>
   );
@@ -47,10 +47,6 @@ function Building({ batchId, isOpen }: { batchId: string; isOpen: boolean }) {
         <>
           <LinesSection batchId={batchId} />
           {isOpen && <LoadPlanSection batchId={batchId} />}
-          <RequirementsSection batchId={batchId} />
-          {isOpen && <TermsSection batchId={batchId} />}
-          {isOpen && <RideAlongSection batchId={batchId} />}
-          <History entity="batch" id={batchId} title="What was done" />
         </>
       }
       side={
@@ -60,11 +56,19 @@ function Building({ batchId, isOpen }: { batchId: string; isOpen: boolean }) {
           <TravellerSection batchId={batchId} />
         </>
       }
+      foot={
+        <>
+          <RequirementsSection batchId={batchId} />
+          {isOpen && <TermsSection batchId={batchId} />}
+          {isOpen && <RideAlongSection batchId={batchId} />}
+          <History entity="batch" id={batchId} title="What was done" />
+        </>
+      }
     />
   );
 }
 
-function Sent({ batchId }: { batchId: string }) {
+function Sent({ batchId, isCancelled }: { batchId: string; isCancelled: boolean }) {
   const mayWrite = useMay('batch.message');
   const [now] = useState(() => new Date().toISOString());
   return (
@@ -74,13 +78,11 @@ function Sent({ batchId }: { batchId: string }) {
           <HowItStands batchId={batchId} />
           <LinesSection batchId={batchId} />
           <BatchMessages batchId={batchId} now={now} mayWrite={mayWrite} />
-          <ReceiptsSection batchId={batchId} />
+          {!isCancelled && <ReceiptsSection batchId={batchId} />}
           <CertificatesSection batchId={batchId} dispatched />
-          <NonconformancesSection batchId={batchId} dispatched />
+          {!isCancelled && <NonconformancesSection batchId={batchId} dispatched />}
           <InvoicesSection batchId={batchId} dispatched />
-          <ReleaseSection batchId={batchId} />
-          <RequirementsSection batchId={batchId} />
-          <History entity="batch" id={batchId} title="What was done" />
+          {!isCancelled && <ReleaseSection batchId={batchId} />}
         </>
       }
       side={
@@ -88,6 +90,12 @@ function Sent({ batchId }: { batchId: string }) {
           <TravellerSection batchId={batchId} />
           <LinkSection batchId={batchId} />
           <PriceSection batchId={batchId} />
+        </>
+      }
+      foot={
+        <>
+          <RequirementsSection batchId={batchId} />
+          <History entity="batch" id={batchId} title="What was done" />
         </>
       }
     />

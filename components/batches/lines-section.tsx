@@ -113,7 +113,7 @@ function LineRow({
           {line.lotNumber}
         </Link>
       </Cell>
-      <Cell>
+      <Cell className="min-w-44 [overflow-wrap:anywhere]">
         <Link href={`/parts/${line.partId}`} className="num font-semibold no-underline hover:underline">
           {line.partNumber}
         </Link>{' '}

@@ -49,7 +49,7 @@ export function OverrideDialog({
       onClose={close}
       busy={busy}
       onSubmit={pass}
-      title={`Override: ${finding?.sentence ?? ''}`}
+      title={`Override: ${finding?.sentence.replace(/\.$/, '') ?? ''}`}
       lead={`${finding?.rest ?? ''} Your name and reason stay on the record and print on the traveller.`}
       actions={
         <>

@@ -157,7 +157,9 @@ function ReissueForm({
         }
         side={
           <Section title="What is different" note={changes.length > 0 ? 'prints on both papers' : undefined}>
-            {changes.length === 0 && <Empty says="Nothing yet." />}
+            {changes.length === 0 && (
+              <Empty says={after === null ? 'An amount cannot be read.' : 'Nothing yet.'} />
+            )}
             <ul aria-label="What is different">
               {changes.map((change) => (
                 <li key={change} className="border-b border-rule py-[7px]">
@@ -171,7 +173,10 @@ function ReissueForm({
                 type="submit"
                 busy={busy}
                 busyLabel="Re-issuing"
-                notNow={changes.length === 0 && 'Change something first.'}
+                notNow={
+                  changes.length === 0 &&
+                  (after === null ? 'Write the amount in red anew.' : 'Change something first.')
+                }
               >
                 Re-issue and tell the processor
               </Button>

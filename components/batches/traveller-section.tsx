@@ -60,8 +60,14 @@ function Papers({ batchId }: { batchId: string }) {
     <Section title="Papers" note="every version stays">
       {data?.documents.length === 0 && <p className="py-1.5 text-second text-quiet">None is made yet.</p>}
       <ul aria-label="Papers">
-        {(data?.documents ?? []).map((document) => (
-          <Paper key={document.id} document={document} clock={clock} />
+        {(data?.documents ?? []).map((document, at, all) => (
+          <Paper
+            key={document.id}
+            document={document}
+            // Both papers of a version say the same of what is different.
+            says={all[at - 1]?.documentVersion === document.documentVersion ? [] : document.changes}
+            clock={clock}
+          />
         ))}
       </ul>
     </Section>
@@ -69,10 +75,12 @@ function Papers({ batchId }: { batchId: string }) {
 }
 
 function Paper({
-  document: { kind, documentVersion, fileId, sha256, statedAt, changes },
+  document: { kind, documentVersion, fileId, sha256, statedAt },
+  says,
   clock,
 }: {
   document: BatchDocument;
+  says: readonly string[];
   clock: Clock;
 }) {
   const name = `${KINDS[kind]}, version ${documentVersion}`;
@@ -97,7 +105,7 @@ function Paper({
           <Moment at={new Date(statedAt)} clock={clock} />
         </span>
       </div>
-      {changes.map((change) => (
+      {says.map((change) => (
         <div key={change}>{change}</div>
       ))}
       {sha256 && (

@@ -9,12 +9,8 @@ import { useClock } from '@/components/session/use-me';
 import { Button } from '@/components/ui/button';
 import { Day } from '@/components/ui/day';
 import { DateField, TextField } from '@/components/ui/field';
-import {
-  getCertificate,
-  listCertificates,
-  RecordCertificate,
-  recordCertificate,
-} from '@/lib/certificates/contract';
+import { getCertificate, listCertificates } from '@/lib/certificates/contract';
+import { RecordCertificate, recordCertificate } from '@/lib/certificates/prove-contract';
 
 import { SetAsideForm } from './set-aside-form';
 import type { Proving } from './use-proving';

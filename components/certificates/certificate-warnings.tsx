@@ -6,7 +6,8 @@ import { useClock } from '@/components/session/use-me';
 import { Button } from '@/components/ui/button';
 import { CheckList, CheckRow } from '@/components/ui/check-row';
 import { Moment } from '@/components/ui/day';
-import { getCertificate, listCertificates, takeUpCertificate } from '@/lib/certificates/contract';
+import { getCertificate, listCertificates } from '@/lib/certificates/contract';
+import { takeUpCertificate } from '@/lib/certificates/prove-contract';
 
 import { certificateName, STATE_WORDS } from './certificate-words';
 import type { Proving } from './use-proving';

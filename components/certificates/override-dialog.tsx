@@ -7,7 +7,8 @@ import { z } from 'zod';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { TextArea } from '@/components/ui/field';
-import { DecideRequirement, type ProvedRequirement } from '@/lib/certificates/contract';
+import type { ProvedRequirement } from '@/lib/certificates/contract';
+import { DecideRequirement } from '@/lib/certificates/prove-contract';
 import { limitWords } from '@/lib/parts/limit-words';
 
 import type { Proving } from './use-proving';

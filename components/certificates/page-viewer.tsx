@@ -59,7 +59,7 @@ export function PageViewer({ file, title, facts, choice, read }: PageViewerProps
         className="min-h-[320px] flex-1 overflow-auto max-lg:max-h-[60dvh]"
       >
         <div className="flex w-max min-w-full justify-center p-[18px]">
-          <div className="relative">
+          <div className="relative" style={kept && isDrawn(file) ? roomFor(kept, drawn) : undefined}>
             {width > 0 && file.mediaType === 'application/pdf' && (
               <PdfPage
                 url={url}
@@ -110,6 +110,12 @@ export function PageViewer({ file, title, facts, choice, read }: PageViewerProps
 
 const isDrawn = ({ mediaType }: ViewedFile): boolean =>
   mediaType === 'application/pdf' || mediaType.startsWith('image/');
+
+/** Kept free while the page is still being drawn, so that what points at it stands where it will be. */
+const roomFor = ({ width, height }: PageSpotsProps['page'], drawn: number) => ({
+  minWidth: drawn,
+  minHeight: Math.floor((drawn * height) / width),
+});
 
 /** A picture that was turned or straightened to be read has its words elsewhere than the picture shown. */
 const isDrawnUpright = (file: ViewedFile, page: PageSpotsProps['page']): boolean =>

@@ -3,7 +3,8 @@ import { useWrite } from '@/components/api/use-api';
 import { useMay } from '@/components/session/use-me';
 import { Button } from '@/components/ui/button';
 import { CheckList, CheckRow } from '@/components/ui/check-row';
-import { getCertificate, listCertificates, recordCertificate } from '@/lib/certificates/contract';
+import { getCertificate, listCertificates } from '@/lib/certificates/contract';
+import { recordCertificate } from '@/lib/certificates/prove-contract';
 import { getCertificateReading, readCertificateAgain } from '@/lib/readings/contract';
 import { qualityOf } from '@/lib/readings/quality';
 

@@ -45,7 +45,7 @@ export function RequirementOpen({ requirement, proving, canEdit }: RequirementOp
               </span>
             )}
           </p>
-          {!decision && <WhatWasRead requirementId={requirement.id} proving={proving} />}
+          <WhatWasRead requirement={requirement} proving={proving} />
           {canEdit && <Judge key={proving.reading.chosen} requirement={requirement} proving={proving} />}
           {doing === null && (
             <div className="flex flex-wrap gap-2">
@@ -102,10 +102,10 @@ function SourceWords({ requirement }: { requirement: ProvedRequirement }) {
   );
 }
 
-/** Why it is proposed, with the spot itself as large as it can be read. */
-function WhatWasRead({ requirementId, proving }: { requirementId: string; proving: Proving }) {
+/** Why it is proposed, with the spot itself as large as it can be read; what a person entered instead stands beside it. */
+function WhatWasRead({ requirement: { id, decision }, proving }: Omit<RequirementOpenProps, 'canEdit'>) {
   const { data, proposalOf, drawn } = proving.reading;
-  const proposal = proposalOf(requirementId);
+  const proposal = proposalOf(id);
   if (!data || !proposal) return null;
   const fact = data.facts[proposal.facts[0] ?? -1];
   const page = data.pages.find(({ number }) => number === fact?.page);
@@ -113,7 +113,16 @@ function WhatWasRead({ requirementId, proving }: { requirementId: string; provin
     <div className="flex flex-wrap items-center gap-4">
       {fact && page && <SpotPicture fact={fact} page={page} drawn={drawn} />}
       <p className="min-w-48 flex-1 text-second">
-        <strong>{proposal.stated || 'Nothing is stated.'}</strong> {proposal.why}
+        {decision && decision.stated !== proposal.stated ? (
+          <>
+            The machine read <s>{proposal.stated || 'nothing'}</s>; {decision.decidedBy} entered{' '}
+            <strong>{decision.stated || 'nothing'}</strong>.
+          </>
+        ) : (
+          <>
+            <strong>{proposal.stated || 'Nothing is stated.'}</strong> {proposal.why}
+          </>
+        )}
       </p>
     </div>
   );

@@ -8,13 +8,8 @@ import { Button } from '@/components/ui/button';
 import { TextField } from '@/components/ui/field';
 import { showMessage } from '@/components/ui/message';
 import { call } from '@/lib/api/client';
-import {
-  getCertificate,
-  listCertificates,
-  setAsideCertificate,
-  takeUpCertificate,
-  type CertificateDetail,
-} from '@/lib/certificates/contract';
+import { getCertificate, listCertificates, type CertificateDetail } from '@/lib/certificates/contract';
+import { setAsideCertificate, takeUpCertificate } from '@/lib/certificates/prove-contract';
 
 const Reason = setAsideCertificate.input.pick({ reason: true });
 const USUAL = ['Second copy', 'Replaced by a corrected one', 'Of another batch'];

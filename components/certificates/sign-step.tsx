@@ -8,7 +8,8 @@ import { TextField } from '@/components/ui/field';
 import { VerdictMark } from '@/components/ui/marks';
 import { showMessage } from '@/components/ui/message';
 import type { ApiError } from '@/lib/api/client';
-import { getCertificate, listCertificates, signCertificate } from '@/lib/certificates/contract';
+import { getCertificate, listCertificates } from '@/lib/certificates/contract';
+import { signCertificate } from '@/lib/certificates/prove-contract';
 
 import { certificateName, hashStart } from './certificate-words';
 import type { Proving } from './use-proving';

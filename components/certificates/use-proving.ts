@@ -4,13 +4,8 @@ import { useState } from 'react';
 import { useRead, useWrite } from '@/components/api/use-api';
 import { useMay } from '@/components/session/use-me';
 import { showMessage } from '@/components/ui/message';
-import {
-  decideRequirement,
-  decideRequirements,
-  getCertificate,
-  listCertificates,
-  type ProvedRequirement,
-} from '@/lib/certificates/contract';
+import { getCertificate, listCertificates, type ProvedRequirement } from '@/lib/certificates/contract';
+import { decideRequirement, decideRequirements } from '@/lib/certificates/prove-contract';
 import { readinessOf } from '@/lib/certificates/ready-to-sign';
 import type { Verdict } from '@/lib/certificates/verdict';
 

@@ -1,6 +1,9 @@
 import type { KeptPage } from '@/lib/readings/kept-reading';
 
-/** A page that is words only, a mail or a text: each word where the reader laid it. */
+/** How much of its own size a letter of our typewriter face is wide. */
+const LETTER_WIDTH = 0.6;
+
+/** A page that is words only, a mail or a text: each word where the reader laid it, as wide as it was laid. */
 export function WordsPage({ page, width }: { page: KeptPage; width: number }) {
   const scale = width / page.width;
   return (
@@ -8,12 +11,13 @@ export function WordsPage({ page, width }: { page: KeptPage; width: number }) {
       {page.words.map(([text, left, top, right, bottom], at) => (
         <span
           key={at}
-          className="absolute font-mono leading-none whitespace-pre text-[#1e2326]"
+          className="absolute font-mono whitespace-pre text-[#1e2326]"
           style={{
             left: left * scale,
             top: top * scale,
             width: (right - left) * scale,
-            fontSize: (bottom - top) * scale * 0.95,
+            fontSize: ((right - left) * scale) / (text.length * LETTER_WIDTH),
+            lineHeight: `${(bottom - top) * scale}px`,
           }}
         >
           {text}

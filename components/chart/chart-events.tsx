@@ -1,6 +1,6 @@
-import type { DrawnEvent } from '@/lib/evidence/chart/drawing-of';
+import { Cell, Row, Table } from '@/components/ui/table';
+import type { ChartDrawing, DrawnEvent } from '@/lib/evidence/chart/drawing-of';
 import { timeTickWords } from '@/lib/evidence/chart/ticks';
-import type { ChartDrawing } from '@/lib/evidence/chart/drawing-of';
 
 const CODE_WORDS: Record<DrawnEvent['code'], string> = {
   gap: 'Gap',
@@ -12,6 +12,15 @@ const CODE_WORDS: Record<DrawnEvent['code'], string> = {
   spike: 'Jump',
   quench: 'Quench',
 };
+
+const COLUMNS = [
+  { says: 'No.' },
+  { says: 'What' },
+  { says: 'Thermocouple' },
+  { says: 'From' },
+  { says: 'To' },
+  { says: 'In words' },
+];
 
 interface ChartEventsProps {
   events: readonly DrawnEvent[];
@@ -25,44 +34,30 @@ export function ChartEvents({ events, counts, chosen, onChoose }: ChartEventsPro
   if (events.length === 0)
     return <p className="pt-3 text-second text-quiet">Nothing happened that needs a word.</p>;
   return (
-    <div className="overflow-x-auto pt-3">
-      <table className="w-full">
-        <caption className="sr-only">Events of the chart</caption>
-        <thead>
-          <tr className="border-b border-ink text-left font-cond text-caption text-faint">
-            {['No.', 'What', 'Thermocouple', 'From', 'To', 'In words'].map((head) => (
-              <th key={head} scope="col" className="py-1 pr-4 font-normal">
-                {head}
-              </th>
-            ))}
-          </tr>
-        </thead>
-        <tbody>
-          {events.map(({ number, code, channel, from, to, says }) => (
-            <tr
-              key={number}
-              aria-current={number === chosen || undefined}
-              className="border-b border-rule align-top aria-[current]:bg-bench"
+    <Table label="Events of the chart" columns={COLUMNS} dense className="pt-3">
+      {events.map(({ number, code, channel, from, to, says }) => (
+        <Row key={number} selected={number === chosen}>
+          <Cell>
+            <button
+              type="button"
+              className="num min-h-6 min-w-6 underline"
+              aria-label={`Show event ${number}`}
+              onClick={() => onChoose(number)}
             >
-              <td className="py-1.5 pr-4">
-                <button
-                  type="button"
-                  className="num min-h-6 min-w-6 underline"
-                  aria-label={`Show event ${number}`}
-                  onClick={() => onChoose(number)}
-                >
-                  {number}
-                </button>
-              </td>
-              <td className="py-1.5 pr-4 font-cond text-word">{CODE_WORDS[code]}</td>
-              <td className="py-1.5 pr-4">{channel ?? 'all'}</td>
-              <td className="num py-1.5 pr-4">{timeTickWords(from, counts)}</td>
-              <td className="num py-1.5 pr-4">{timeTickWords(to, counts)}</td>
-              <td className="py-1.5 text-row">{says}</td>
-            </tr>
-          ))}
-        </tbody>
-      </table>
-    </div>
+              {number}
+            </button>
+          </Cell>
+          <Cell strong>{CODE_WORDS[code]}</Cell>
+          <Cell head="Thermocouple">{channel ?? 'all'}</Cell>
+          <Cell code head="From">
+            {timeTickWords(from, counts)}
+          </Cell>
+          <Cell code head="To">
+            {timeTickWords(to, counts)}
+          </Cell>
+          <Cell>{says}</Cell>
+        </Row>
+      ))}
+    </Table>
   );
 }

@@ -24,12 +24,7 @@ export function ChartPicture({ paths, className }: { paths: ChartPaths; classNam
       {panels.map((panel) => (
         <Panel key={panel.top} panel={panel} left={left} right={right} />
       ))}
-      <text
-        x={left + 8}
-        y={detail.band.upper - 6}
-        fill="var(--proved-ink)"
-        className="font-cond text-caption font-semibold"
-      >
+      <text x={left + 8} y={detail.band.upper - 6} fill="var(--proved-ink)" className="font-cond text-word">
         {paths.bandSays}
       </text>
       <g className="font-mono text-axis" fill="var(--quiet)" textAnchor="middle">
@@ -54,7 +49,7 @@ export function ChartPicture({ paths, className }: { paths: ChartPaths; classNam
             stroke="none"
             fill="var(--ink)"
             textAnchor="middle"
-            className="font-cond text-caption font-semibold"
+            className="font-cond text-word"
           >
             {soak.says}
           </text>

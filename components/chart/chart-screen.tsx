@@ -50,9 +50,9 @@ function Chart({ data }: { data: ChartDetail }) {
         sub={
           <>
             {batch.processor}, sent by {chart.sentBy}, <Moment at={new Date(chart.createdAt)} clock={clock} />
-            {data.others.map((other) => (
+            {data.others.map((other, at) => (
               <span key={other.id}>
-                {' '}
+                {at === 0 ? '. Of the same batch: ' : ', '}
                 <Link href={`/charts/${other.id}`}>{other.fileName}</Link>
               </span>
             ))}

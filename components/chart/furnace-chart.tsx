@@ -10,6 +10,7 @@ import { reduced, rowAt } from '@/lib/evidence/chart/reduced';
 import { bandSpan, timeSpan, wholeSpan } from '@/lib/evidence/chart/spans';
 import { timeTickWords } from '@/lib/evidence/chart/ticks';
 
+import { ChartControls } from './chart-controls';
 import { ChartEvents } from './chart-events';
 import { ChartLegend } from './chart-legend';
 import { ChartPanel } from './chart-panel';
@@ -59,24 +60,26 @@ export function FurnaceChart({ drawing }: { drawing: ChartDrawing }) {
     pointAt(event.from);
     setSpoken(event.says);
   };
+  const step = (by: 1 | -1) => choose((chosen ?? (by === 1 ? 0 : events.length + 1)) + by);
+  const middle = (view.from + view.to) / 2;
+  const zoom = (nearer: boolean) => zoomAround(at ?? middle, nearer);
   const press = (event: KeyboardEvent) => {
     if (event.ctrlKey || event.metaKey || event.altKey) return;
-    const middle = (view.from + view.to) / 2;
-    // A step is a share of the view, but never less than a row.
-    const step =
+    // A stride is a share of the view, but never less than a row.
+    const stride =
       Math.max((view.to - view.from) / STEPS, (whole.to - whole.from) / seconds.length) *
       (event.shiftKey ? 10 : 1);
     const keys: Record<string, () => void> = {
-      ArrowRight: () => pointAt((at ?? middle) + step),
-      ArrowLeft: () => pointAt((at ?? middle) - step),
+      ArrowRight: () => pointAt((at ?? middle) + stride),
+      ArrowLeft: () => pointAt((at ?? middle) - stride),
       Home: () => pointAt(whole.from),
       End: () => pointAt(whole.to),
-      '+': () => zoomAround(at ?? middle, true),
-      '=': () => zoomAround(at ?? middle, true),
-      '-': () => zoomAround(at ?? middle, false),
+      '+': () => zoom(true),
+      '=': () => zoom(true),
+      '-': () => zoom(false),
       '0': () => zoomTo(null),
-      ']': () => choose((chosen ?? 0) + 1),
-      '[': () => choose((chosen ?? events.length + 1) - 1),
+      ']': () => step(1),
+      '[': () => step(-1),
     };
     const act = keys[event.key];
     if (!act) return;
@@ -116,16 +119,19 @@ export function FurnaceChart({ drawing }: { drawing: ChartDrawing }) {
           </div>
         )}
         <p id={keysId} className="flex justify-between pt-1 text-source text-faint">
-          <span>
-            Arrows move the cursor, + and - zoom, 0 shows all, [ and ] step through the events. Or drag over a
-            time.
-          </span>
+          <span className="touch:hidden">Drag over a time to see it nearer; the arrows move the cursor.</span>
           <span className="num">{row === null ? '' : timeTickWords(seconds[row] ?? 0, counts)}</span>
         </p>
         <p role="status" className="sr-only">
           {spoken}
         </p>
       </div>
+      <ChartControls
+        onNearer={() => zoom(true)}
+        onFurther={() => zoom(false)}
+        onWhole={() => zoomTo(null)}
+        onEvent={step}
+      />
       <ChartPicture paths={paths} className={palette ? 'hidden print:block' : ''} />
       <ChartLegend channels={channels} looks={looks} unit={unit} row={row} />
       <ChartEvents events={events} counts={counts} chosen={chosen} onChoose={choose} />

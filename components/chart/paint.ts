@@ -41,7 +41,9 @@ export function paintMarks(plot: uPlot, drawing: ChartDrawing, palette: Palette,
   for (const end of ends)
     line(ctx, [end, bbox.top - (inWords ? 12 * size : 0)], [end, bbox.top + bbox.height]);
   if (inWords) {
-    ctx.font = `600 ${13 * size}px ${palette.cond}`;
+    // What is drawn before may have left another: the words stand on their line. Below 14.5 px the i loses its dot.
+    ctx.textBaseline = 'alphabetic';
+    ctx.font = `600 ${14.5 * size}px ${palette.cond}`;
     ctx.fillStyle = palette['proved-ink'];
     const upper = plot.valToPos(band.upper, 'y', true);
     ctx.textAlign = 'left';

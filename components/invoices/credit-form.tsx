@@ -6,7 +6,8 @@ import { z } from 'zod';
 import { showOnForm } from '@/components/api/show-on-form';
 import { Button } from '@/components/ui/button';
 import { NumberInput, TextField } from '@/components/ui/field';
-import { creditInvoice, type InvoiceDetail } from '@/lib/invoices/contract';
+import type { InvoiceDetail } from '@/lib/invoices/contract';
+import { creditInvoice } from '@/lib/invoices/pay-contract';
 import { amountText } from '@/lib/money';
 
 import { amountField } from './amount-field';

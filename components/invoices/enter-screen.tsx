@@ -40,7 +40,9 @@ export function EnterScreen({ invoice }: { invoice: InvoiceDetail }) {
             />
           </div>
         )}
-        <EnterForm invoice={invoice} />
+        <div className="min-w-0">
+          <EnterForm invoice={invoice} />
+        </div>
       </div>
     </>
   );

@@ -6,7 +6,8 @@ import { Button, ButtonLink } from '@/components/ui/button';
 import { Edge } from '@/components/ui/edge';
 import { Failing } from '@/components/ui/failing';
 import { momentWords } from '@/lib/day-words';
-import { approveInvoice, approveInvoiceSecond, type InvoiceDetail } from '@/lib/invoices/contract';
+import type { InvoiceDetail } from '@/lib/invoices/contract';
+import { approveInvoice, approveInvoiceSecond } from '@/lib/invoices/pay-contract';
 import { amountText } from '@/lib/money';
 
 import { payableNow } from './compare-rows';

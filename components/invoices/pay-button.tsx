@@ -5,7 +5,8 @@ import { useState } from 'react';
 import { useMay } from '@/components/session/use-me';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
-import { payInvoice, type InvoiceDetail } from '@/lib/invoices/contract';
+import type { InvoiceDetail } from '@/lib/invoices/contract';
+import { payInvoice } from '@/lib/invoices/pay-contract';
 import { amountText } from '@/lib/money';
 
 import { invoiceName } from './invoice-words';

@@ -4,7 +4,8 @@ import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { TextArea } from '@/components/ui/field';
-import { refuseInvoice, type InvoiceDetail } from '@/lib/invoices/contract';
+import type { InvoiceDetail } from '@/lib/invoices/contract';
+import { refuseInvoice } from '@/lib/invoices/pay-contract';
 
 import { invoiceName } from './invoice-words';
 import { useInvoiceWrite } from './use-invoice-write';

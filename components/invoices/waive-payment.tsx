@@ -8,7 +8,8 @@ import { Dialog } from '@/components/ui/dialog';
 import { TextArea } from '@/components/ui/field';
 import { showMessage } from '@/components/ui/message';
 import { listAudit } from '@/lib/audit/contract';
-import { listInvoices, waivePayment } from '@/lib/invoices/contract';
+import { listInvoices } from '@/lib/invoices/contract';
+import { waivePayment } from '@/lib/invoices/pay-contract';
 import { getGate } from '@/lib/stock/contract';
 
 /** Offered only where the gate is shut for want of this batch's money. */

@@ -21,7 +21,9 @@ export function CheckRow({ level, sentence, rest, source, waysOut }: CheckRowPro
         <span className="sr-only">{HEARD[level]}: </span>
         <strong>{sentence}</strong> {rest}
         {source && <div className="text-source text-faint">{source}</div>}
-        {waysOut && <div className="mt-1 flex flex-wrap gap-x-4 gap-y-1 touch:gap-y-2">{waysOut}</div>}
+        {waysOut && (
+          <div className="mt-1 flex flex-wrap items-baseline gap-x-4 gap-y-1 touch:gap-y-2">{waysOut}</div>
+        )}
       </div>
     </li>
   );

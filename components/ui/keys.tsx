@@ -120,8 +120,9 @@ function focusNumberField(event: KeyboardEvent) {
   field.select();
 }
 
+/** What lies in a closed `<details>` has a size and still cannot take the focus. */
 function canBeSeen(element: HTMLElement): boolean {
-  return element.getClientRects().length > 0;
+  return element.checkVisibility();
 }
 
 function visibleKeys(): KeyLine[] {

@@ -3,6 +3,7 @@ import { linesWords } from '@/lib/parts/lines-words';
 import type { BatchTables } from '@/lib/reference/batch-tables';
 import { fitsEquipment, type Box, type EquipmentFit } from '@/lib/trade/envelope/fits-equipment';
 import { massOnHearth } from '@/lib/trade/envelope/mass-on-hearth';
+import { poundsFromKg } from '@/lib/trade/units/mass';
 import type { Process } from '@/lib/trade/process';
 
 import type { Check, CheckedEquipment, CheckedLine, CheckFacts } from './check';
@@ -178,9 +179,13 @@ function heavyLoad(
       level: 'warn',
       subject: `load ${load.number}`,
       sentence: `${isOnly ? 'The load' : `Load ${load.number}`} is heavier than any hearth carries.`,
-      rest: `${mass.isComputed ? 'About ' : ''}${stands.totalKg.toFixed(1)} kg; ${strongest.name} carries ${strongest.limitWords ?? ''}. Split it, or ask how it is run.`,
+      rest: `${mass.isComputed ? 'About ' : ''}${massBeside(stands.totalKg, strongest.limitWords)}; ${strongest.name} carries ${strongest.limitWords ?? ''}. Split it, or ask how it is run.`,
       ...citing(stands.source),
       waysOut: [{ way: 'set_loads', says: 'Set the loads' }, SEE_EQUIPMENT],
     },
   ];
 }
+
+/** In the unit of what it is compared with. */
+const massBeside = (kg: number, words: string | null): string =>
+  words?.endsWith('lb') ? `${poundsFromKg(kg).toFixed(0)} lb` : `${kg.toFixed(1)} kg`;

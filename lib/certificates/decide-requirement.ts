@@ -8,7 +8,7 @@ import { authorize } from '@/lib/auth/authorize';
 import { shopOf, type Ctx } from '@/lib/auth/context';
 import { AppError, changedMeanwhile, notFound } from '@/lib/errors';
 
-import type { DecideRequirement } from './contract';
+import type { DecideRequirement } from './prove-contract';
 import { lockCertificate, refuseSetAside } from './lock-certificate';
 import { isSealed } from './sealed-requirements';
 

@@ -3,7 +3,7 @@ import type { z } from 'zod';
 import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
 
-import type { DecideRequirements } from './contract';
+import type { DecideRequirements } from './prove-contract';
 import { decideRequirement } from './decide-requirement';
 
 /** Several of one verdict: each has its decision and its record, and its own statement where one is given. */

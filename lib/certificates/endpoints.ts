@@ -7,6 +7,7 @@ import { decideRequirement } from './decide-requirement';
 import { decideRequirements } from './decide-requirements';
 import { getCertificate } from './get-certificate';
 import { listCertificates } from './list-certificates';
+import * as proving from './prove-contract';
 import { recordCertificate } from './record-certificate';
 import { setAsideCertificate } from './set-aside-certificate';
 import { signCertificate } from './sign-certificate';
@@ -15,12 +16,12 @@ import { takeUpCertificate } from './take-up-certificate';
 export const listCertificatesEndpoint = endpoint(contract.listCertificates, listCertificates);
 export const getCertificateEndpoint = endpoint(contract.getCertificate, getCertificate);
 export const addCertificateEndpoint = endpoint(contract.addCertificate, addCertificate);
-export const recordCertificateEndpoint = endpoint(contract.recordCertificate, recordCertificate);
-export const decideRequirementEndpoint = endpoint(contract.decideRequirement, decideRequirement);
-export const decideRequirementsEndpoint = endpoint(contract.decideRequirements, decideRequirements);
-export const setAsideCertificateEndpoint = endpoint(contract.setAsideCertificate, setAsideCertificate);
-export const takeUpCertificateEndpoint = endpoint(contract.takeUpCertificate, takeUpCertificate);
-export const signCertificateEndpoint = endpointInSteps(contract.signCertificate, {
+export const recordCertificateEndpoint = endpoint(proving.recordCertificate, recordCertificate);
+export const decideRequirementEndpoint = endpoint(proving.decideRequirement, decideRequirement);
+export const decideRequirementsEndpoint = endpoint(proving.decideRequirements, decideRequirements);
+export const setAsideCertificateEndpoint = endpoint(proving.setAsideCertificate, setAsideCertificate);
+export const takeUpCertificateEndpoint = endpoint(proving.takeUpCertificate, takeUpCertificate);
+export const signCertificateEndpoint = endpointInSteps(proving.signCertificate, {
   outside: tryPasswordAgain,
   run: signCertificate,
 });

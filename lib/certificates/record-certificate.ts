@@ -7,7 +7,7 @@ import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
 import { AppError } from '@/lib/errors';
 
-import type { RecordCertificate } from './contract';
+import type { RecordCertificate } from './prove-contract';
 import { lockCertificate, refuseOtherVersion, refuseSetAside } from './lock-certificate';
 
 /** Number and date as printed on it; both are sealed by the signature, so they stay once it is signed. */

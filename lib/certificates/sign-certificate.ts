@@ -16,7 +16,7 @@ import { newId } from '@/lib/ids';
 import { verifyPasswordAgain } from '@/lib/people/verify-password-again';
 import { readLineStanding, type LineStanding } from '@/lib/receipts/line-standing';
 
-import type { SignCertificate } from './contract';
+import type { SignCertificate } from './prove-contract';
 import { faultsOfCoverage } from './coverable';
 import { lockCertificate, refuseOtherVersion, refuseSetAside } from './lock-certificate';
 import { readinessOf } from './ready-to-sign';

@@ -9,7 +9,7 @@ import { refreshStanding } from '@/lib/batches/refresh-standing';
 import { AppError } from '@/lib/errors';
 import { amountText } from '@/lib/money';
 
-import type * as contract from './contract';
+import type * as contract from './pay-contract';
 import { lastPaymentOf } from './last-payment';
 import { balanceOf, enterMoney } from './money-ledger';
 import { numberKey } from '@/lib/evidence/invoice/number-key';

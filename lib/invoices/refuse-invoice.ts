@@ -7,7 +7,7 @@ import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
 import { refreshStanding } from '@/lib/batches/refresh-standing';
 
-import type * as contract from './contract';
+import type * as contract from './pay-contract';
 import { queueRefusal } from './queue-refusal';
 import { lockInvoice } from './read-invoice';
 

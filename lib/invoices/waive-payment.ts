@@ -9,7 +9,7 @@ import { refreshStanding } from '@/lib/batches/refresh-standing';
 import { AppError } from '@/lib/errors';
 import { lockSentBatch } from '@/lib/receipts/lock-batch';
 
-import type * as contract from './contract';
+import type * as contract from './pay-contract';
 
 /** Lets the pieces of a batch pass the gate although money is open. What is owed stays owed. */
 export async function waivePayment(

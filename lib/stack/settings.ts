@@ -21,7 +21,7 @@ export interface StackSettings {
   readonly env: Readonly<Record<string, string>>;
 }
 
-const TEST_OFFSET = 1000;
+const TEST_OFFSET = 1300;
 const TEST_SECRET = 'the-tests-need-no-secret-worth-keeping';
 /** Given to the tests as "not set", whatever the machine's own settings say: tests never touch a real service. */
 const SERVICE_NAMES = [

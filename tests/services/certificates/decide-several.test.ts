@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
 
-import { DecideRequirements } from '@/lib/certificates/contract';
+import { DecideRequirements } from '@/lib/certificates/prove-contract';
 import { decideRequirements } from '@/lib/certificates/decide-requirements';
 import { getCertificate } from '@/lib/certificates/get-certificate';
 import { newId } from '@/lib/ids';

@@ -2,7 +2,7 @@ import { sql } from 'drizzle-orm';
 import { expect, test } from 'vitest';
 
 import { approveInvoice } from '@/lib/invoices/approve-invoice';
-import { refuseInvoice as declaration } from '@/lib/invoices/contract';
+import { refuseInvoice as declaration } from '@/lib/invoices/pay-contract';
 import { enterInvoice } from '@/lib/invoices/enter-invoice';
 import { getInvoice } from '@/lib/invoices/queries';
 import { refuseInvoice } from '@/lib/invoices/refuse-invoice';

@@ -85,9 +85,12 @@ describe('room for a part', () => {
 });
 
 describe('a load', () => {
-  test('over what every hearth carries is warned of', () => {
+  test('over what every hearth carries is warned of, in the unit of the hearth', () => {
     expect(codes([sheet(40, 20, { massG: 1000 })], [FURNACE], 271)).toEqual([['warn', 'load_over_hearth']]);
     expect(codes([sheet(40, 20, { massG: 1000 })], [FURNACE], 270)).toEqual([]);
+    const entered = { ...FURNACE, limitWords: '595 lb' };
+    const [said] = found([sheet(40, 20, { massG: 1000 })], [entered], 271);
+    expect(said?.rest).toContain('597 lb; F-3 carries 595 lb.');
     const unknown = { ...FURNACE, id: 'f-4', limitG: null };
     expect(codes([sheet(40, 20, { massG: 1000 })], [FURNACE, unknown], 271)).toEqual([]);
   });
