@@ -36,6 +36,7 @@ export function RideAlongSection({ batchId }: { batchId: string }) {
   const lots = usePages(listWaitingLots, asked);
   const rows = lots.data?.pages.flatMap((page) => page.rows) ?? [];
   const room = expectedPrice({ ...batch, lines: held.lines }).toMinimumMinor;
+  const hasLoads = rows.some(({ load }) => load !== null);
   const columns = [
     { says: 'Lot' },
     { says: 'Part' },
@@ -43,6 +44,7 @@ export function RideAlongSection({ batchId }: { batchId: string }) {
     { says: 'Condition' },
     { says: 'Pieces', right: true },
     { says: `Mass, ${massUnit(units)}`, right: true },
+    ...(hasLoads ? [{ says: 'Load' }] : []),
     { says: 'Add', hidden: true },
   ];
   return (
@@ -108,6 +110,13 @@ function RideAlong({ batch, row, units }: { batch: Batch; row: WaitingLot; units
       <Cell figure head={`Mass, ${massUnit(units)}`}>
         <FigureKnown known={massKnown(row)} text={(grams) => massText(grams, units)} />
       </Cell>
+      {row.load && (
+        <Cell head="Load" className="min-w-28">
+          <span className={row.load.number === null ? 'text-second text-quiet' : 'font-semibold'}>
+            {row.load.says}
+          </span>
+        </Cell>
+      )}
       <Cell right>
         {mayBuild && (
           <Button look="word" aria-label={`Add ${row.lotNumber}`} onClick={add}>

@@ -1,3 +1,6 @@
+import Link from 'next/link';
+
+import { readMoment } from '@/components/reference/bench-moment';
 import { Cell, Row, Table } from '@/components/ui/table';
 import { VerdictWord } from '@/components/ui/verdict';
 import type { Verdict } from '@/components/ui/marks';
@@ -25,7 +28,24 @@ export function WhatItSays({ judged, requirement }: { judged: JudgedChart; requi
           </Row>
         ))}
       </Table>
+      <QuenchClock judged={judged} requirement={requirement} />
     </>
+  );
+}
+
+/**
+ * Where the chart shows the quench and knows its day, the way to the clock of metal that is not aged yet. It counts from
+ * the end of the soak, which lies before the quench: the clock ends too early rather than too late.
+ */
+function QuenchClock({ judged, requirement }: { judged: JudgedChart; requirement: ChartRequirement }) {
+  const { soak_end: end, quench_delay_s: delay } = judged;
+  if (requirement.maxQuenchDelayS === undefined || delay === null || end === null) return null;
+  if (readMoment(end) === null) return null;
+  return (
+    <p className="pt-2 text-second">
+      If it is not aged yet:{' '}
+      <Link href={`/reference/holding?quenched=${end.slice(0, 16)}`}>as-quenched clock from this quench</Link>
+    </p>
   );
 }
 

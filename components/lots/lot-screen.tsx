@@ -7,6 +7,7 @@ import { useClock, useMay } from '@/components/session/use-me';
 import { Conditions } from '@/components/parts/parts-screen';
 import { ButtonLink } from '@/components/ui/button';
 import { Day, Moment } from '@/components/ui/day';
+import { AsQuenchedNote } from '@/components/reference/as-quenched-note';
 import { Empty } from '@/components/ui/empty';
 import { PageHead } from '@/components/ui/page-head';
 import { MainAndSide, Section } from '@/components/ui/section';
@@ -146,6 +147,7 @@ function RouteOfLot({ lot }: { lot: Lot }) {
                 <span className="block text-second [overflow-wrap:anywhere] text-quiet">
                   {step.specification} {step.specificationRevision}
                 </span>
+                <AsQuenchedNote alloy={lot.part.alloy} condition={step.targetCondition} />
               </span>
               {waiting > 0 && (
                 <span className="whitespace-nowrap">

@@ -1,6 +1,7 @@
 'use client';
 import { useFormContext, useWatch } from 'react-hook-form';
 
+import { AsQuenchedNote } from '@/components/reference/as-quenched-note';
 import { Button } from '@/components/ui/button';
 import { TextField } from '@/components/ui/field';
 import { PieceCounter } from '@/components/ui/piece-counter';
@@ -46,6 +47,7 @@ export function LineCounters({ line, at }: { line: ReceivingLine; at: number }) 
           {line.shortOpen > 0 && <span className="text-held-ink">, {line.shortOpen} reported short</span>}
         </span>
       </div>
+      <AsQuenchedNote alloy={line.alloy} condition={line.targetCondition} />
       {line.serialised ? (
         <SerialCounts line={line} at={at} />
       ) : (

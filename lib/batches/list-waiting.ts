@@ -13,10 +13,15 @@ import { computedMassOf, computedSize } from '@/lib/parts/computed-mass';
 import { tablesOf } from '@/lib/reference/tables-of';
 
 import { approvalStanding, type Approval, type ApprovalStanding } from './approval';
+import { loadsToJoin, loadToJoinWords } from './load-to-join';
+import type { LoadLine } from './loads-of-batch';
 import { materialWords } from './material-words';
+import { readCheckFacts } from './read-check-facts';
 import type {
+  AskedStep,
   listStepProcessors as processorsDeclaration,
   listWaitingLots as lotsDeclaration,
+  WaitingLot,
 } from './waiting-contract';
 
 const waits = and(eq(balances.place, 'making'), gt(balances.pieces, 0));
@@ -52,15 +57,7 @@ export async function listWaitingSteps(ctx: Ctx) {
 /** Oldest lot first. Lots that already have a line on `besideBatchId` are changed there, not added again. */
 export async function listWaitingLots(
   ctx: Ctx,
-  {
-    after,
-    limit,
-    process,
-    specification,
-    specificationRevision,
-    classType,
-    besideBatchId,
-  }: z.output<(typeof lotsDeclaration)['input']>,
+  { after, limit, besideBatchId, ...asked }: z.output<(typeof lotsDeclaration)['input']>,
 ) {
   authorize(ctx, 'batch.read');
   const rows = await ctx.tx
@@ -87,6 +84,7 @@ export async function listWaitingLots(
       widthMm: parts.widthMm,
       heightMm: parts.heightMm,
       thicknessMm: parts.thicknessMm,
+      madeCondition: parts.madeCondition,
       madeOn: lots.madeOn,
     })
     .from(balances)
@@ -96,12 +94,7 @@ export async function listWaitingLots(
     .where(
       and(
         waits,
-        eq(routeSteps.process, process),
-        eq(routeSteps.specification, specification),
-        specificationRevision === undefined
-          ? isNull(routeSteps.specificationRevision)
-          : eq(routeSteps.specificationRevision, specificationRevision),
-        classType === undefined ? isNull(routeSteps.classType) : eq(routeSteps.classType, classType),
+        isOf(asked),
         besideBatchId === undefined
           ? undefined
           : sql`not exists (select 1 from ${batchLines} l where l.batch_id = ${besideBatchId} and l.lot_id = ${lots.id} and l.step_id = ${routeSteps.id})`,
@@ -112,6 +105,7 @@ export async function listWaitingLots(
     .limit(limit + 1);
   const page = toPage(rows, limit, (row) => row.lotId);
   const tables = await tablesOf(ctx);
+  const loadOf = await loadsBeside(ctx, besideBatchId);
   return {
     ...page,
     rows: page.rows.map((row) => ({
@@ -119,7 +113,44 @@ export async function listWaitingLots(
       computed: computedSize(computedMassOf(tables, row)),
       material: materialWords(row),
       partSuperseded: row.supersededAt !== null,
+      load: loadOf({
+        id: row.lotId,
+        part: row,
+        step: {
+          ...row,
+          process: asked.process,
+          specification: asked.specification,
+          specificationRevision: asked.specificationRevision ?? null,
+          classType: asked.classType ?? null,
+        },
+      }),
     })),
+  };
+}
+
+/** Left out, a part of the step means that the step has none. */
+function isOf({ process, specification, specificationRevision, classType }: AskedStep) {
+  return and(
+    eq(routeSteps.process, process),
+    eq(routeSteps.specification, specification),
+    specificationRevision === undefined
+      ? isNull(routeSteps.specificationRevision)
+      : eq(routeSteps.specificationRevision, specificationRevision),
+    classType === undefined ? isNull(routeSteps.classType) : eq(routeSteps.classType, classType),
+  );
+}
+
+/** Which load of a batch a lot could join; none without a batch. */
+async function loadsBeside(
+  ctx: Ctx,
+  batchId: string | undefined,
+): Promise<(waiting: LoadLine) => WaitingLot['load']> {
+  if (batchId === undefined) return () => null;
+  const { tables, lines } = await readCheckFacts(ctx, batchId);
+  const toJoin = loadsToJoin(tables, lines);
+  return (waiting) => {
+    const found = toJoin(waiting);
+    return found && { number: found.number, says: loadToJoinWords(found) };
   };
 }
 

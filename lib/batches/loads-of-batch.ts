@@ -6,7 +6,7 @@ import { planLoads, type KeptApart, type LoadPlan, type PlannedLoad } from '@/li
 import type { Process } from '@/lib/trade/process';
 import { celsiusDifferenceFromFahrenheit } from '@/lib/trade/units/temperature';
 
-import type { CheckedLine } from './check';
+import type { CheckedPart, CheckedStep } from './check';
 import { groupedBy } from './grouped-by';
 import { metalOf } from './metal-of';
 
@@ -14,7 +14,14 @@ import { metalOf } from './metal-of';
 const UNIFORMITY_C = celsiusDifferenceFromFahrenheit(10);
 
 /** What loads are planned of: lines of a batch, and lots that could join it. */
-export type LoadLine = Pick<CheckedLine, 'id' | 'part' | 'step' | 'stepId'>;
+export interface LoadLine {
+  readonly id: string;
+  readonly part: Pick<
+    CheckedPart,
+    'alloy' | 'form' | 'clad' | 'thicknessMm' | 'madeCondition' | 'endCondition'
+  >;
+  readonly step: Omit<CheckedStep, 'id' | 'ordering'>;
+}
 
 export interface LoadOfLines<Line> extends PlannedLoad {
   readonly lines: readonly Line[];
@@ -113,7 +120,7 @@ function inOrder<Line>(all: readonly Line[], some: readonly Line[]): Line[] {
 }
 
 /** All that a plan looks at: lines of one metal, thickness and treatment are planned as one, whatever parts they are. */
-const kindOf = ({ part, step }: LoadLine): string =>
+export const kindOf = ({ part, step }: LoadLine): string =>
   [
     ...[part.alloy, part.form, part.clad, part.thicknessMm, part.madeCondition, part.endCondition],
     ...[step.process, step.specification, step.classType, step.conditionBefore, step.targetCondition],

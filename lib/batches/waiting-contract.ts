@@ -45,6 +45,8 @@ export const WaitingLot = z.object({
   massG: z.number().nullable(),
   computed: Computed.nullable(),
   madeOn: Moment,
+  /** Beside a batch: the furnace load of its plan that the lot could join. Null where none is planned or asked for. */
+  load: z.object({ number: z.int().nullable(), says: z.string() }).nullable(),
 });
 export type WaitingLot = z.output<typeof WaitingLot>;
 
@@ -55,6 +57,7 @@ const AskedStep = z.object({
   specificationRevision: z.string().max(40).optional(),
   classType: z.string().max(120).optional(),
 });
+export type AskedStep = z.output<typeof AskedStep>;
 
 export const listWaitingLots = declare({
   id: 'listWaitingLots',

@@ -1,24 +1,31 @@
+import { mmFromInches } from '@/lib/trade/units/length';
+import { kgFromPounds } from '@/lib/trade/units/mass';
+
 /** What is measured of a part. Each is kept as typed, and beside it in one SI unit for reckoning. */
 export type Quantity = 'length' | 'mass' | 'area';
 
-/** Base units: mm, g, mm². Factors are exact by definition of the inch and the pound. */
+const IN = mmFromInches(1);
+const FT = mmFromInches(12);
+const LB = kgFromPounds(1) * 1000;
+
+/** Base units: mm, g, mm². */
 const UNITS: Record<Quantity, readonly { words: readonly string[]; factor: number }[]> = {
   length: [
-    { words: ['in', 'inch', 'inches', '"', '″'], factor: 25.4 },
-    { words: ['ft', 'foot', 'feet', "'", '′'], factor: 304.8 },
+    { words: ['in', 'inch', 'inches', '"', '″'], factor: IN },
+    { words: ['ft', 'foot', 'feet', "'", '′'], factor: FT },
     { words: ['mm'], factor: 1 },
     { words: ['cm'], factor: 10 },
     { words: ['m'], factor: 1000 },
   ],
   mass: [
-    { words: ['lb', 'lbs', 'pound', 'pounds'], factor: 453.59237 },
-    { words: ['oz'], factor: 28.349523125 },
+    { words: ['lb', 'lbs', 'pound', 'pounds'], factor: LB },
+    { words: ['oz'], factor: LB / 16 },
     { words: ['g'], factor: 1 },
     { words: ['kg'], factor: 1000 },
   ],
   area: [
-    { words: ['in²', 'in2', 'sq in', 'sqin', 'in^2'], factor: 645.16 },
-    { words: ['ft²', 'ft2', 'sq ft', 'sqft', 'ft^2'], factor: 92_903.04 },
+    { words: ['in²', 'in2', 'sq in', 'sqin', 'in^2'], factor: IN ** 2 },
+    { words: ['ft²', 'ft2', 'sq ft', 'sqft', 'ft^2'], factor: FT ** 2 },
     { words: ['mm²', 'mm2', 'sq mm', 'mm^2'], factor: 1 },
     { words: ['cm²', 'cm2', 'sq cm', 'cm^2'], factor: 100 },
     { words: ['dm²', 'dm2', 'sq dm', 'dm^2'], factor: 10_000 },

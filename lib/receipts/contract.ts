@@ -18,6 +18,9 @@ export const ReceivingLine = z.object({
   partNumber: z.string(),
   partRevision: z.string(),
   partName: z.string(),
+  alloy: z.string(),
+  /** The condition that the step makes. */
+  targetCondition: z.string().nullable(),
   serialised: z.boolean(),
   pieces: z.int(),
   away: z.int(),

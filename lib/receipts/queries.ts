@@ -5,6 +5,7 @@ import { receiptLines, receiptPhotos, receipts } from '@/db/schema/receipts';
 import { files } from '@/db/schema/files';
 import { pieces as namedPieces } from '@/db/schema/lots';
 import { processors } from '@/db/schema/organisations';
+import { parts, routeSteps } from '@/db/schema/parts';
 import { authorize } from '@/lib/auth/authorize';
 import type { Ctx } from '@/lib/auth/context';
 import { hashToken } from '@/lib/auth/identify';
@@ -68,6 +69,7 @@ export async function getReceiving(ctx: Ctx, { batchId }: { batchId: string }) {
   if (!batch) throw notFound('batch');
   const { receipts: count, ...head } = batch;
   const lines = await readLineStanding(ctx, batchId);
+  const metals = await metalOfLines(ctx, batchId);
   const awayPieces = await namedAway(
     ctx,
     lines.filter((line) => line.serialised).map((line) => line.lineId),
@@ -82,6 +84,8 @@ export async function getReceiving(ctx: Ctx, { batchId }: { batchId: string }) {
       partNumber: line.partNumber,
       partRevision: line.partRevision,
       partName: line.partName,
+      alloy: metals.get(line.lineId)?.alloy ?? '',
+      targetCondition: metals.get(line.lineId)?.targetCondition ?? null,
       serialised: line.serialised,
       pieces: line.pieces,
       away: awayOf(line),
@@ -91,6 +95,17 @@ export async function getReceiving(ctx: Ctx, { batchId }: { batchId: string }) {
         .map(({ id, serial }) => ({ id, serial })),
     })),
   };
+}
+
+/** What the lines are made of, and the condition that their step gives them. */
+async function metalOfLines(ctx: Ctx, batchId: string) {
+  const rows = await ctx.tx
+    .select({ lineId: batchLines.id, alloy: parts.alloy, targetCondition: routeSteps.targetCondition })
+    .from(batchLines)
+    .innerJoin(routeSteps, eq(routeSteps.id, batchLines.stepId))
+    .innerJoin(parts, eq(parts.id, routeSteps.partId))
+    .where(eq(batchLines.batchId, batchId));
+  return new Map(rows.map((row) => [row.lineId, row]));
 }
 
 async function namedAway(ctx: Ctx, lineIds: readonly string[]) {

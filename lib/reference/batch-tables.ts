@@ -16,6 +16,8 @@ import { FURNACE_CLASSES_NEEDED } from '@/lib/trade/tables/furnace-classes-neede
 import { MELTING } from '@/lib/trade/tables/melting';
 import { NDT_DESIGNATIONS, type NdtDesignationRow } from '@/lib/trade/tables/ndt-designations';
 import { QUENCH_DELAYS } from '@/lib/trade/tables/quench-delays';
+import { PASSIVATION_BATHS, type PassivationBathRow } from '@/lib/trade/tables/passivation-baths';
+import { PASSIVATION_TESTS, type PassivationTestRow } from '@/lib/trade/tables/passivation-tests';
 import { QUENCH_BATHS, type QuenchBathRow } from '@/lib/trade/tables/quench-media';
 import { CODE_LETTERS } from '@/lib/trade/tables/sampling-code-letters';
 import { SINGLE_SAMPLING_NORMAL } from '@/lib/trade/tables/single-sampling-normal';
@@ -60,6 +62,8 @@ export interface RequirementTables {
   readonly steelWindows: Table<SteelWindowRow>;
   readonly steelTempering: Table<SteelTemperingRow>;
   readonly ndt: Table<NdtDesignationRow>;
+  readonly passivationBaths: Table<PassivationBathRow>;
+  readonly passivationTests: Table<PassivationTestRow>;
   readonly furnaceClasses: Table<ClassNeededRow>;
   readonly codeLetters: Table<CodeLetterRow>;
   readonly sampling: Readonly<Record<'normal' | 'tightened' | 'reduced', Table<SingleSamplingRow>>>;
@@ -72,6 +76,8 @@ const REQUIREMENTS: RequirementTables = {
   steelWindows: STEEL_WINDOWS,
   steelTempering: STEEL_TEMPERING,
   ndt: NDT_DESIGNATIONS,
+  passivationBaths: PASSIVATION_BATHS,
+  passivationTests: PASSIVATION_TESTS,
   furnaceClasses: FURNACE_CLASSES_NEEDED,
   codeLetters: CODE_LETTERS,
   sampling: {

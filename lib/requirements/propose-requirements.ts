@@ -4,8 +4,10 @@ import type { BatchTables } from '@/lib/reference/batch-tables';
 
 import { aluminiumProposals } from './aluminium';
 import { bakeProposals, finishProposals } from './finish';
-import { inspectionProposals } from './inspection';
+import { insideProposals, inspectionProposals } from './inspection';
 import { limitOf } from './limit';
+import { passivationProposals } from './passivation';
+import { peeningProposals } from './peening';
 import { proposal, type AskedLine } from './proposal';
 import { sampleAsOrdered } from './sample-as-ordered';
 import { steelProposals } from './steel';
@@ -48,13 +50,15 @@ function byProcess(tables: BatchTables, asked: AskedLine): ToProve[] {
     case 'chromium_plate':
     case 'anodize':
     case 'chemical_film':
-    case 'passivation':
     case 'phosphate':
       return finishProposals(tables, material, asked);
+    case 'passivation':
+      return passivationProposals(tables, asked);
     case 'shot_peen':
+      return peeningProposals(tables, asked);
     case 'radiography':
     case 'ultrasonic':
-      return [];
+      return insideProposals(asked.step.process, asked);
   }
 }
 

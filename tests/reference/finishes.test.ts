@@ -8,6 +8,7 @@ import { filmCheckDue } from '@/lib/trade/finishes/film-check-due';
 import { finishAsOrdered } from '@/lib/trade/finishes/finish-as-ordered';
 import { finishedLimits, preFinishLimits } from '@/lib/trade/finishes/finish-limits';
 import { passivationAsOrdered } from '@/lib/trade/finishes/passivation-as-ordered';
+import { passivationTest } from '@/lib/trade/finishes/passivation-test';
 import { passivationBath } from '@/lib/trade/finishes/passivation-bath';
 import { readDesignation } from '@/lib/trade/finishes/read-designation';
 import { ANODIZE_LIMITS } from '@/lib/trade/tables/anodize-limits';
@@ -21,6 +22,7 @@ import { CONVERSION_CLASSES } from '@/lib/trade/tables/conversion-classes';
 import { EXPOSURE_LIMITS, type ExposureItem } from '@/lib/trade/tables/exposure-limits';
 import { FILM_CONTROL } from '@/lib/trade/tables/film-control';
 import { FINISH_DEFAULTS } from '@/lib/trade/tables/finish-defaults';
+import { PASSIVATION_TESTS } from '@/lib/trade/tables/passivation-tests';
 import { PASSIVATION_BATHS } from '@/lib/trade/tables/passivation-baths';
 import { PLATING_CLASSES } from '@/lib/trade/tables/plating-classes';
 import { inchesFromMm, mmFromInches } from '@/lib/trade/units/length';
@@ -166,6 +168,24 @@ describe('the trap of an order that does not say which', () => {
       testClass: '4',
     });
     expect(ask('AMS 2700F', false)).toMatchObject({ ok: false, reason: 'specification_not_in_table' });
+  });
+});
+
+describe('tests of passivated lots', () => {
+  test.each(named(publishedRows('passivation-tests', ['practice', 'says'])))(
+    '$said: practice $practice',
+    (row) => {
+      const found = { ok: true, practice: row.practice, says: row.says, source: { document: row.source } };
+      expect(
+        passivationTest(PASSIVATION_TESTS, `nitric 2, practice ${row.practice.toLowerCase()}`),
+      ).toMatchObject(found);
+      expect(passivationTest(PASSIVATION_TESTS, `${row.says} test`)).toMatchObject(found);
+    },
+  );
+
+  test('a sulphate is a sulfate, and a test that is not named is not guessed', () => {
+    expect(passivationTest(PASSIVATION_TESTS, 'copper sulphate')).toMatchObject({ practice: 'D' });
+    expect(passivationTest(PASSIVATION_TESTS, 'nitric 2')).toEqual({ ok: false, reason: 'test_not_stated' });
   });
 });
 

@@ -37,3 +37,6 @@ export interface EmbrittlementRow {
   /** The class that holds when the purchaser names none. */
   readonly classWhenUnnamed?: string;
 }
+
+/** 375 °F, 25 °F to either side: what most documents bake at. */
+export const FROM_350_TO_400_F = { unit: 'F', range: [350, 400] } as const;

@@ -334,6 +334,12 @@ test('what waits is grouped by step, listed oldest first, and shown beside a bat
       (await listWaitingLots(ctx, { ...asked, besideBatchId: made.id })).rows.map((row) => row.lotId),
     ).toEqual([two.id]);
     expect((await getBatchLines(ctx, { batchId: made.id })).lines[0]?.waiting).toBe(3);
+    // Without a batch beside it there is no load to join; beside one of the same sheet it is the first.
+    expect((await listWaitingLots(ctx, asked)).rows[0]?.load).toBeNull();
+    expect((await listWaitingLots(ctx, { ...asked, besideBatchId: made.id })).rows[0]?.load).toMatchObject({
+      number: 1,
+      says: 'load 1',
+    });
   });
 });
 

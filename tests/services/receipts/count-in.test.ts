@@ -109,6 +109,7 @@ test('the pieces of a serialised lot come back by their serial numbers', async (
   );
   await world.as(['inspector'], async (ctx) => {
     const [line] = (await getReceiving(ctx, { batchId: batch.id })).lines;
+    expect(line).toMatchObject({ alloy: '2024', targetCondition: 'T42' });
     const [, a2] = line?.awayPieces ?? [];
     expect(line?.awayPieces.map((piece) => piece.serial)).toEqual(['A1', 'A2', 'A3']);
     await countIn(ctx, {

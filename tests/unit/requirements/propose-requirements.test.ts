@@ -170,6 +170,92 @@ test('penetrant states what the order chose, and only that', () => {
   expect(penetrant('')).toEqual({});
 });
 
+describe('passivation', () => {
+  const STAINLESS: PartChange = { alloy: '304', form: 'bar', endCondition: 'annealed' };
+  const by = (specification: string, classType: string | null, more: Partial<AskedLine> = {}) =>
+    limits(
+      STAINLESS,
+      { process: 'passivation', specification, specificationRevision: null, classType },
+      more,
+    );
+
+  test('by ASTM A967 nitric 2, practice C: bath, temperature, time, and two hours of salt spray', () =>
+    expect(by('ASTM A967', 'nitric 2, practice C')).toEqual({
+      'Passivation bath': 'nitric acid, 20 to 45 %',
+      'Passivation temperature': '70 to 90 °F',
+      'Passivation time': '30 or more min',
+      'Passivation test': 'practice C, salt spray',
+      'Salt spray': '2 or more h',
+    }));
+
+  test('with another test no salt spray is asked for, and the step’s own words count', () => {
+    expect(
+      by('ASTM A967', 'citric 1', { ordering: { sampling_plan: 'copper sulphate, one of a lot' } }),
+    ).toEqual({
+      'Passivation bath': 'citric acid, 4 to 10 %',
+      'Passivation temperature': '140 to 160 °F',
+      'Passivation time': '4 or more min',
+      'Passivation test': 'practice D, copper sulfate',
+    });
+  });
+
+  test('a bath or test that nobody named is not guessed', () =>
+    expect(by('ASTM A967', null)).toEqual({
+      'Passivation test':
+        'as the drawing says, by one practice: A water immersion, B humidity, C salt spray, D copper sulfate or another',
+    }));
+
+  test('by AMS 2700 the class, or what holds without one; an old QQ-P-35 asks for nitric acid and class 4', () => {
+    expect(by('AMS 2700', 'method 1, class 3')).toEqual({ 'Passivation test': 'class 3' });
+    expect(by('AMS 2700', null)).toEqual({ 'Passivation test': 'class 2, one part per lot' });
+    expect(by('QQ-P-35', null)).toEqual({
+      'Passivation bath': 'nitric acid, method 1',
+      'Passivation test': 'class 4',
+    });
+    expect(by('a house instruction', 'nitric 2')).toEqual({});
+  });
+});
+
+describe('what only the drawing knows is asked and never invented', () => {
+  const by = (process: (typeof PROCESSES)[number], specification: string, more: Partial<AskedLine> = {}) =>
+    proposed({}, { process, specification, specificationRevision: null, classType: null }, more);
+
+  test('peening: intensity and coverage, with what holds otherwise where a document says it', () => {
+    const peened = by('shot_peen', 'AMS-S-13165');
+    expect(peened.map(({ characteristic, limit }) => [characteristic, limit])).toEqual([
+      ['Peening intensity', 'as the drawing says, otherwise by thickness and material'],
+      ['Coverage', 'as the drawing says, otherwise 100 % by eye'],
+      ['Shot', 'as the drawing says'],
+    ]);
+    for (const one of peened)
+      expect(one).toMatchObject({
+        source: 'drawing',
+        sourceText: expect.stringMatching(/the drawing decides$/),
+      });
+  });
+
+  test('what the step states of it is proposed as it stands', () =>
+    expect(by('shot_peen', 'AMS2430', { ordering: { intensity: '0.008 to 0.012 A' } })[0]).toMatchObject({
+      characteristic: 'Peening intensity',
+      limit: '0.008 to 0.012 A',
+      source: 'specification',
+    }));
+
+  test('a document that no table has still asks for intensity and coverage', () =>
+    expect(by('shot_peen', 'house instruction 7').map(({ characteristic }) => characteristic)).toEqual([
+      'Peening intensity',
+      'Coverage',
+    ]));
+
+  test.each(['radiography', 'ultrasonic'] as const)('%s: acceptance and inspector', (process) => {
+    const asked = by(process, 'ASTM E1742', { ordering: { acceptance_criteria: 'grade B' } });
+    expect(asked.map(({ characteristic, limit }) => [characteristic, limit]).slice(1)).toEqual([
+      ['Acceptance level', 'grade B'],
+      ['Inspector qualification', 'as the drawing says'],
+    ]);
+  });
+});
+
 describe('samples', () => {
   test.each([
     ['AQL 1.0', { aqlPct: 1, level: 'II', severity: 'normal', isZeroAcceptance: false }],
@@ -191,9 +277,18 @@ describe('samples', () => {
 describe('whatever is proposed', () => {
   const anyStep = fc.record({
     process: fc.constantFrom(...PROCESSES),
-    specification: fc.constantFrom('AMS 2770', 'QQ-P-416', 'MIL-PRF-8625', 'ASTM E1417', 'AMS 2759/9', ''),
+    specification: fc.constantFrom(
+      'AMS 2770',
+      'QQ-P-416',
+      'MIL-PRF-8625',
+      'ASTM E1417',
+      'AMS 2759/9',
+      'ASTM A967',
+      'AMS2430',
+      '',
+    ),
     specificationRevision: fc.constantFrom('F', 'D', null),
-    classType: fc.constantFrom('type II class 1', 'type III class 2', 'level 4', null),
+    classType: fc.constantFrom('type II class 1', 'type III class 2', 'level 4', 'nitric 1', null),
     targetCondition: fc.constantFrom('T42', 'T62', 'T6', 'H1025', '160 to 180 ksi', 'HRC 36 to 40', null),
   });
   const anyPart = fc.record({
@@ -214,7 +309,9 @@ describe('whatever is proposed', () => {
           const all = proposed(part, step, { units, pieces: 40, ordering: { sampling_plan: 'AQL 1.0' } });
           for (const one of all) {
             expect(ToProve.safeParse(one)).toMatchObject({ success: true, data: one });
-            expect(one.sourceText).toMatch(one.source === 'specification' ? /trust/ : /^condition /);
+            expect(one.sourceText).toMatch(
+              one.source === 'specification' ? /trust/ : /^condition |the drawing decides$/,
+            );
             if (/\d/.test(one.limit) && one.unit !== '')
               expect(readLimit(one.limit, one.unit)).not.toBeNull();
           }
