@@ -47,7 +47,8 @@ export interface PageSpotsProps {
   page: KeptPage;
   spots: readonly Spot[];
   selected: string | null;
-  numberOf: (row: string) => number;
+  /** The number of its row in the list; null where the rows have none. */
+  numberOf: ((row: string) => number) | null;
   onRow: (row: string) => void;
   /** Words of the page, chosen for the row that is open. */
   onWords: ((words: string) => void) | null;
@@ -85,11 +86,13 @@ export function PageSpots({ page, spots, selected, numberOf, onRow, onWords }: P
             style={{ ...place(spot.box), translate: '-4px -4px' }}
             onClick={() => onRow(spot.row)}
           >
-            <span
-              className={`num absolute flex min-h-[15px] min-w-[17px] items-center justify-center px-1 text-[0.68rem] font-bold ${SIDES[freeSide(spot.box, page)]} ${NUMBERS[spot.verdict]}`}
-            >
-              {numberOf(spot.row)}
-            </span>
+            {numberOf && (
+              <span
+                className={`num absolute flex min-h-[15px] min-w-[17px] items-center justify-center px-1 text-[0.68rem] font-bold ${SIDES[freeSide(spot.box, page)]} ${NUMBERS[spot.verdict]}`}
+              >
+                {numberOf(spot.row)}
+              </span>
+            )}
           </span>
         ))}
     </div>

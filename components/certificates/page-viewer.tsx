@@ -41,7 +41,14 @@ export function PageViewer({ file, title, facts, choice, read }: PageViewerProps
   const paging = usePaging(isDrawn(file) ? null : (read?.pages.length ?? null));
   useTurnToLit(paging, read);
   const kept = read?.pages.find(({ number }) => number === paging.page);
+  // Until its page is on the screen nothing can point at it.
+  const [drawnPage, setDrawnPage] = useState<number | null>(null);
+  const onDrawn = () => {
+    setDrawnPage(paging.page);
+    read?.onDrawn();
+  };
   const { element, width } = useElementWidth<HTMLDivElement>();
+  const isOnScreen = !isDrawn(file) || drawnPage === paging.page;
   const url = `/api/files/${file.id}/content?inline=1`;
   const drawn = Math.max(200, Math.floor((width - 36) * paging.zoom));
   return (
@@ -68,7 +75,7 @@ export function PageViewer({ file, title, facts, choice, read }: PageViewerProps
                 upright={kept?.turned ?? null}
                 turned={paging.turned}
                 onPages={paging.setPages}
-                onDrawn={read?.onDrawn}
+                onDrawn={onDrawn}
               />
             )}
             {file.mediaType.startsWith('image/') && (
@@ -80,7 +87,7 @@ export function PageViewer({ file, title, facts, choice, read }: PageViewerProps
                 width={drawn}
                 style={{ width: drawn, transform: `rotate(${paging.turned + (kept?.turned ?? 0)}deg)` }}
                 className="lw-drawn h-auto max-w-none"
-                onLoad={read?.onDrawn}
+                onLoad={onDrawn}
               />
             )}
             {!isDrawn(file) &&
@@ -91,7 +98,7 @@ export function PageViewer({ file, title, facts, choice, read }: PageViewerProps
                   This file cannot be shown here. <a href={`/api/files/${file.id}/content`}>Save it</a>
                 </p>
               ))}
-            {read && kept && paging.turned === 0 && isDrawnUpright(file, kept) && (
+            {read && kept && isOnScreen && paging.turned === 0 && isDrawnUpright(file, kept) && (
               <PageSpots
                 page={kept}
                 spots={read.spots}

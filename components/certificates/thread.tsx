@@ -1,7 +1,7 @@
 'use client';
 import { useEffect, useRef } from 'react';
 
-/** A thin line from the lit spot on the page to the row that is open, as long as both can be seen. */
+/** A thin line from the lit spot on the page to the row or field that is chosen, as long as both can be seen. */
 export function Thread({ row, drawn }: { row: string | null; drawn: number }) {
   const path = useRef<SVGPathElement>(null);
   useEffect(() => {
@@ -36,7 +36,8 @@ export function Thread({ row, drawn }: { row: string | null; drawn: number }) {
 function pathBetween(row: string | null): string {
   const spot = document.getElementById('lw-lit-spot');
   const button = row === null ? null : document.getElementById(`row-${row}`);
-  const [frame, list] = [spot?.closest('[role=region]'), button?.closest('tr')];
+  // In a form there are no rows: the field itself.
+  const [frame, list] = [spot?.closest('[role=region]'), button?.closest('tr') ?? button];
   if (!spot || !button || !frame || !list) return '';
   const [from, within, to] = [
     spot.getBoundingClientRect(),

@@ -1,7 +1,7 @@
 'use client';
 import { useFormContext } from 'react-hook-form';
 
-import { useLazyRead, useWrite } from '@/components/api/use-api';
+import { useWrite } from '@/components/api/use-api';
 import { Button } from '@/components/ui/button';
 import { CheckList, CheckRow } from '@/components/ui/check-row';
 import { showMessage } from '@/components/ui/message';
@@ -9,18 +9,11 @@ import { CURRENCIES } from '@/lib/money';
 import { getInvoiceReading, readInvoiceAgain, type InvoiceReading } from '@/lib/invoices/reading-contract';
 
 import { typedAmount } from './amount-field';
-import { whatOf, type EnterIn } from './enter-values';
-
-const LOOK_AGAIN_MS = 1500;
+import { whatRead, type EnterIn } from './enter-values';
 
 /** What the machine read on the page, to be taken over in one press; what stands against the paper is said first. */
-export function AsRead({ invoiceId }: { invoiceId: string }) {
+export function AsRead({ invoiceId, read: data }: { invoiceId: string; read: InvoiceReading | undefined }) {
   const form = useFormContext<EnterIn>();
-  const { data } = useLazyRead(
-    getInvoiceReading,
-    { invoiceId },
-    { refreshEveryMs: LOOK_AGAIN_MS, refreshWhile: ({ state }) => state === 'waiting' },
-  );
   if (!data || data.state === null) return null;
   if (data.state === 'waiting')
     return (
@@ -84,7 +77,7 @@ function NotRead({ invoiceId, fault }: { invoiceId: string; fault: string | null
 /** What was read stands in for what was typed; a field that could not be read stays as it is. */
 function valuesAsRead(read: InvoiceReading, before: EnterIn): EnterIn {
   const lines = read.lines.map((line) => ({
-    what: line.kind === 'pieces' ? whatOf(line.lineId ?? '') : line.kind,
+    what: whatRead(line),
     description: line.description,
     pieces: line.pieces === null ? '' : String(line.pieces),
     unitPriceMinor: typedAmount(line.unitPriceMinor),

@@ -1,7 +1,6 @@
 'use client';
-import { zodResolver } from '@hookform/resolvers/zod';
 import { useRouter } from 'next/navigation';
-import { FormProvider, useFieldArray, useForm, useWatch } from 'react-hook-form';
+import { useFieldArray, useFormContext, useWatch } from 'react-hook-form';
 
 import { showOnForm } from '@/components/api/show-on-form';
 import { Button, ButtonLink } from '@/components/ui/button';
@@ -11,16 +10,15 @@ import { amountText, CURRENCIES, parseAmount } from '@/lib/money';
 
 import { AsRead } from './as-read';
 import { EnterLine } from './enter-line';
-import { emptyLine, EnterValues, linesOf, startingValues, type EnterIn, type EnterOut } from './enter-values';
+import { emptyLine, linesOf, type EnterIn, type EnterOut } from './enter-values';
+import { FieldSpot } from './field-spot';
+import { fieldId, type InvoiceSpots } from './use-invoice-spots';
 import { useInvoiceWrite } from './use-invoice-write';
 
 /** What the invoice says, typed as it stands there; what is wrong is said beside its field and nothing typed is lost. */
-export function EnterForm({ invoice }: { invoice: InvoiceDetail }) {
+export function EnterForm({ invoice, spots }: { invoice: InvoiceDetail; spots: InvoiceSpots }) {
   const router = useRouter();
-  const form = useForm<EnterIn, unknown, EnterOut>({
-    resolver: zodResolver(EnterValues),
-    defaultValues: startingValues(invoice),
-  });
+  const form = useFormContext<EnterIn, unknown, EnterOut>();
   const lines = useFieldArray({ control: form.control, name: 'lines' });
   const { write } = useInvoiceWrite(enterInvoice);
   const { errors, isSubmitting } = form.formState;
@@ -34,21 +32,34 @@ export function EnterForm({ invoice }: { invoice: InvoiceDetail }) {
     if (done) router.replace(`/invoices/${invoice.id}`);
   });
   return (
-    <FormProvider {...form}>
-      {invoice.file && <AsRead invoiceId={invoice.id} />}
-      <form noValidate onSubmit={enter} aria-label="What the invoice says">
+    <div className="min-w-0">
+      {invoice.file && <AsRead invoiceId={invoice.id} read={spots.read} />}
+      <FieldSpot spots={spots} />
+      <form
+        noValidate
+        onSubmit={enter}
+        onFocus={({ target }) => spots.choose(target.getAttribute('name'))}
+        aria-label="What the invoice says"
+      >
         <div className="grid grid-cols-2 items-start gap-x-3 gap-y-3 border-t-heavy border-ink pt-3 sm:grid-cols-3">
           <TextField
             label="Number of the invoice"
             mono
             error={errors.number?.message}
+            id={fieldId('number')}
             {...form.register('number')}
           />
-          <DateField label="Dated" error={errors.datedOn?.message} {...form.register('datedOn')} />
+          <DateField
+            label="Dated"
+            error={errors.datedOn?.message}
+            id={fieldId('datedOn')}
+            {...form.register('datedOn')}
+          />
           <DateField
             label="Due"
             hint="if it says so"
             error={errors.dueOn?.message}
+            id={fieldId('dueOn')}
             {...form.register('dueOn')}
           />
         </div>
@@ -78,6 +89,7 @@ export function EnterForm({ invoice }: { invoice: InvoiceDetail }) {
           <NumberInput
             label="Total it asks for"
             error={errors.totalMinor?.message}
+            id={fieldId('totalMinor')}
             {...form.register('totalMinor')}
           />
         </div>
@@ -102,7 +114,7 @@ export function EnterForm({ invoice }: { invoice: InvoiceDetail }) {
           </p>
         )}
       </form>
-    </FormProvider>
+    </div>
   );
 }
 

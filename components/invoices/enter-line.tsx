@@ -9,6 +9,7 @@ import { parseAmount } from '@/lib/money';
 import { typedAmount } from './amount-field';
 import { kindOf, orderLineWords, OTHER_PIECES, whatOf, type EnterIn, type EnterOut } from './enter-values';
 import { LINE_KIND_WORDS } from './invoice-words';
+import { fieldId } from './use-invoice-spots';
 
 interface EnterLineProps {
   at: number;
@@ -39,6 +40,7 @@ export function EnterLine({ at, invoice, onRemove }: EnterLineProps) {
           className="col-span-2 sm:col-span-1"
           label={`Line ${at + 1} is`}
           options={optionsOf(invoice)}
+          id={fieldId(`lines.${at}.what`)}
           {...form.register(`lines.${at}.what`)}
         />
         {isPieces && (
@@ -46,6 +48,7 @@ export function EnterLine({ at, invoice, onRemove }: EnterLineProps) {
             label="Pieces"
             inputMode="numeric"
             error={errors?.pieces?.message}
+            id={fieldId(`lines.${at}.pieces`)}
             {...form.register(`lines.${at}.pieces`, { onChange: follow })}
           />
         )}
@@ -53,6 +56,7 @@ export function EnterLine({ at, invoice, onRemove }: EnterLineProps) {
           <NumberInput
             label="Each"
             error={errors?.unitPriceMinor?.message}
+            id={fieldId(`lines.${at}.unitPriceMinor`)}
             {...form.register(`lines.${at}.unitPriceMinor`, { onChange: follow })}
           />
         )}
@@ -60,6 +64,7 @@ export function EnterLine({ at, invoice, onRemove }: EnterLineProps) {
           className={isPieces ? '' : 'sm:col-start-4'}
           label="Amount"
           error={errors?.amountMinor?.message}
+          id={fieldId(`lines.${at}.amountMinor`)}
           {...form.register(`lines.${at}.amountMinor`)}
         />
         <TextField
@@ -67,6 +72,7 @@ export function EnterLine({ at, invoice, onRemove }: EnterLineProps) {
           label="As it says"
           error={errors?.description?.message}
           maxLength={200}
+          id={fieldId(`lines.${at}.description`)}
           {...form.register(`lines.${at}.description`)}
         />
         {onRemove && (

@@ -1,5 +1,9 @@
 'use client';
+import { zodResolver } from '@hookform/resolvers/zod';
+import { FormProvider, useForm, type FieldPath } from 'react-hook-form';
+
 import { PageViewer } from '@/components/certificates/page-viewer';
+import { Thread } from '@/components/certificates/thread';
 import { useClock } from '@/components/session/use-me';
 import { Moment } from '@/components/ui/day';
 import { PageHead } from '@/components/ui/page-head';
@@ -7,13 +11,35 @@ import { BatchTag } from '@/components/ui/tag';
 import type { InvoiceDetail } from '@/lib/invoices/contract';
 
 import { EnterForm } from './enter-form';
+import { EnterValues, startingValues, type EnterIn, type EnterOut } from './enter-values';
+import { useInvoiceSpots } from './use-invoice-spots';
+
+/** Fields that take words of the page as they stand there. */
+const TAKES_WORDS = /number$|description$|pieces$|Minor$/;
+
+/** Without a currency's sign or a unit that stands close to it. */
+const IS_FIGURE = /pieces$|Minor$/;
 
 /** The page as it was received, and beside it what it says. */
 export function EnterScreen({ invoice }: { invoice: InvoiceDetail }) {
   const clock = useClock();
+  const form = useForm<EnterIn, unknown, EnterOut>({
+    resolver: zodResolver(EnterValues),
+    defaultValues: startingValues(invoice),
+  });
+  const spots = useInvoiceSpots(invoice.id, form);
+  const { selected } = spots;
   const { file } = invoice;
+  // Only names of the form's own fields are ever chosen.
+  const toField = (field: string) => form.setFocus(field as FieldPath<EnterIn>);
+  const putWords = (words: string) => {
+    if (selected === null) return;
+    const typed = IS_FIGURE.test(selected) ? words.replace(/[^\d.,-]/g, '') : words;
+    form.setValue(selected as FieldPath<EnterIn>, typed, { shouldDirty: true, shouldValidate: true });
+    toField(selected);
+  };
   return (
-    <>
+    <FormProvider {...form}>
       <PageHead
         tag={
           <BatchTag stage={invoice.stage} number={invoice.batchNumber} href={`/batches/${invoice.batchId}`} />
@@ -37,13 +63,23 @@ export function EnterScreen({ invoice }: { invoice: InvoiceDetail }) {
                   from {invoice.sentBy}, <Moment at={new Date(invoice.createdAt)} clock={clock} />
                 </span>
               }
+              read={{
+                pages: spots.read?.pages ?? [],
+                onDrawn: spots.onDrawn,
+                spots: spots.spots,
+                selected,
+                numberOf: null,
+                onRow: toField,
+                onWords: selected !== null && TAKES_WORDS.test(selected) ? putWords : null,
+              }}
             />
           </div>
         )}
         <div className="min-w-0">
-          <EnterForm invoice={invoice} />
+          <EnterForm invoice={invoice} spots={spots} />
         </div>
+        {file && <Thread row={selected} drawn={spots.drawn} />}
       </div>
-    </>
+    </FormProvider>
   );
 }

@@ -3,6 +3,7 @@ import { z } from 'zod';
 import { optionalNumberField } from '@/components/ui/form-fields';
 import type { InvoiceDetail, InvoiceLineInput, INVOICE_LINE_KINDS } from '@/lib/invoices/contract';
 import { enterInvoice } from '@/lib/invoices/contract';
+import type { InvoiceReading } from '@/lib/invoices/reading-contract';
 
 import { amountField, optionalAmountField, typedAmount } from './amount-field';
 import { LINE_KIND_WORDS } from './invoice-words';
@@ -49,6 +50,12 @@ const PIECES = 'pieces:';
 /** Pieces that no line of the order is for. */
 export const OTHER_PIECES = PIECES;
 export const whatOf = (lineId: string): string => `${PIECES}${lineId}`;
+/** What a line that was read is for, as it is chosen in the form. */
+export const whatRead = ({
+  kind,
+  lineId,
+}: Pick<InvoiceReading['lines'][number], 'kind' | 'lineId'>): string =>
+  kind === 'pieces' ? whatOf(lineId ?? '') : kind;
 export const kindOf = (what: string): Kind => (what.startsWith(PIECES) ? 'pieces' : (what as Kind));
 
 /** A charge has neither pieces nor a price of each. */

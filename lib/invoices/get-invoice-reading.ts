@@ -8,7 +8,7 @@ import type { Ctx } from '@/lib/auth/context';
 import { notFound } from '@/lib/errors';
 import { compareInvoice } from '@/lib/evidence/invoice/compare-invoice';
 import type { SeenInvoice, StatedInvoice } from '@/lib/evidence/invoice/invoice';
-import { KeptInvoice } from '@/lib/readings/kept-reading';
+import { KeptInvoice, type KeptPage } from '@/lib/readings/kept-reading';
 import { readBatchOrder } from '@/lib/readings/orders-of-batch';
 
 import type { InvoiceReading } from './reading-contract';
@@ -22,6 +22,8 @@ const NOTHING: InvoiceReading = {
   currency: null,
   totalMinor: null,
   lines: [],
+  facts: [],
+  pages: [],
   discrepancies: [],
 };
 /** Enough to find a second copy in; older ones are found when the number is entered. */
@@ -55,6 +57,8 @@ export async function getInvoiceReading(
     dueOn: stated.due_date,
     currency: stated.currency,
     totalMinor: minor(stated.total),
+    facts: stated.facts,
+    pages: reading.pages as KeptPage[],
     lines: [...pieceLines(stated, await orderedLines(ctx, invoice.batchId)), ...charges(stated)],
     discrepancies: compareInvoice({
       stated,
@@ -76,8 +80,9 @@ async function orderedLines(ctx: Ctx, batchId: string): Promise<OrderedLine[]> {
 }
 
 const pieceLines = (stated: StatedInvoice, ordered: readonly OrderedLine[]): InvoiceReading['lines'] =>
-  stated.lines.map(({ part_number, qty, unit_price, amount }) => ({
+  stated.lines.map(({ part_number, qty, unit_price, amount }, at) => ({
     kind: 'pieces',
+    field: `lines[${at}]`,
     lineId: ordered.find(({ partNumber }) => partNumber === part_number)?.id ?? null,
     description: part_number ?? 'as printed',
     pieces: qty !== null && Number.isInteger(qty) ? qty : null,
@@ -88,8 +93,7 @@ const pieceLines = (stated: StatedInvoice, ordered: readonly OrderedLine[]): Inv
 function charges(stated: StatedInvoice): InvoiceReading['lines'] {
   const charge = (
     kind: InvoiceReading['lines'][number]['kind'],
-    description: string,
-    amount: number | null,
+    { field, description = field, amount }: { field: string; description?: string; amount: number | null },
   ): InvoiceReading['lines'] =>
     amount === 0
       ? []
@@ -97,6 +101,7 @@ function charges(stated: StatedInvoice): InvoiceReading['lines'] {
           {
             kind,
             lineId: null,
+            field,
             description,
             pieces: null,
             unitPriceMinor: null,
@@ -104,11 +109,19 @@ function charges(stated: StatedInvoice): InvoiceReading['lines'] {
           },
         ];
   return [
-    ...charge('lot_minimum', 'to the lot minimum', stated.lot_minimum_adjustment),
-    ...charge('certification', 'certification', stated.certification_fee),
-    ...charge('freight', 'freight', stated.freight),
-    ...charge('tax', 'tax', stated.tax),
-    ...stated.other_charges.flatMap(({ description, amount }) => charge('other', description, amount)),
+    ...charge('lot_minimum', {
+      field: 'lot_minimum_adjustment',
+      description: 'to the lot minimum',
+      amount: stated.lot_minimum_adjustment,
+    }),
+    ...charge('certification', {
+      field: 'certification_fee',
+      description: 'certification',
+      amount: stated.certification_fee,
+    }),
+    ...charge('freight', { field: 'freight', amount: stated.freight }),
+    ...charge('tax', { field: 'tax', amount: stated.tax }),
+    ...stated.other_charges.flatMap((one, at) => charge('other', { field: `other_charges[${at}]`, ...one })),
   ];
 }
 

@@ -3,6 +3,8 @@ import { z } from 'zod';
 import { declare } from '@/lib/api/endpoint';
 import { Id } from '@/lib/api/shapes';
 import { InvoiceDiscrepancy } from '@/lib/evidence/invoice/invoice';
+import { Fact } from '@/lib/evidence/fact';
+import { KeptPage } from '@/lib/readings/kept-reading';
 import { READING_STATES } from '@/lib/readings/reading-state';
 
 import { INVOICE_LINE_KINDS } from './contract';
@@ -24,8 +26,13 @@ export const InvoiceReading = z.object({
       pieces: z.int().nullable(),
       unitPriceMinor: z.int().nullable(),
       amountMinor: z.int().nullable(),
+      /** What its facts are called: `lines[0]` with what stands in that row, or the charge itself. */
+      field: z.string(),
     }),
   ),
+  /** Where each thing stands. */
+  facts: z.array(Fact),
+  pages: z.array(KeptPage),
   discrepancies: z.array(InvoiceDiscrepancy),
 });
 export type InvoiceReading = z.output<typeof InvoiceReading>;

@@ -1,7 +1,11 @@
 import { constants, setPriority } from 'node:os';
 
 import { statedIn } from '@/lib/evidence/certificate/read/read-certificate';
+import { drawingOf } from '@/lib/evidence/chart/drawing-of';
+import { seenIn } from '@/lib/evidence/chart/judge';
+import { chartPaths } from '@/lib/evidence/chart/paths';
 import { readChart } from '@/lib/evidence/chart/read-chart';
+import { recordingOf } from '@/lib/evidence/chart/recording';
 import { readInvoice } from '@/lib/evidence/invoice/read-invoice';
 import { makeRecogniser } from '@/lib/evidence/open/recogniser';
 import { boxAsFiled, factsAsFiled } from '@/lib/evidence/open/as-filed';
@@ -9,8 +13,10 @@ import { openFile } from '@/lib/evidence/open/open-file';
 import type { Fact } from '@/lib/evidence/fact';
 import { UnreadableFile, type OpenedFile, type Page } from '@/lib/evidence/page';
 
+import type { ChartPicture } from '@/lib/pdf/chart-picture';
 import type { KeptChart } from '@/lib/charts/kept-chart';
 import type { KeptCertificates, KeptInvoice, KeptPage, ReadFile } from './kept-reading';
+import type { ChartAsk } from './read-document-queue';
 import type { ReadingAnswer, ReadingRequest } from './reading-request';
 
 /**
@@ -38,13 +44,14 @@ async function answer(request: ReadingRequest): Promise<ReadingAnswer> {
 }
 
 interface ReadContent {
-  content: KeptCertificates | KeptInvoice | KeptChart;
+  content: KeptCertificates | KeptInvoice | KeptChart | ChartPicture;
   pages: KeptPage[];
 }
 
 async function read({ kind, name, bytes, ask }: ReadingRequest): Promise<ReadContent> {
-  if (kind === 'chart') {
+  if (kind === 'chart' || kind === 'chart_picture') {
     if (!ask) throw new Error('a chart is held against something');
+    if (kind === 'chart_picture') return { content: pictureOf(bytes, ask), pages: [] };
     return { content: { ...ask, judged: readChart(bytes, ask.requirement, ask.corrections) }, pages: [] };
   }
   const opened = await openFile(bytes, { name, recogniser });
@@ -57,6 +64,14 @@ async function read({ kind, name, bytes, ask }: ReadingRequest): Promise<ReadCon
   return kind === 'invoice'
     ? { content: { file, invoice: shown(readInvoice(opened)) }, pages }
     : { content: { file, certificates: statedIn(opened).map(shown) }, pages };
+}
+
+/** In units of the picture; its letters are three quarters of them on the sheet. */
+const PICTURE = { width: 720, height: 400 };
+
+function pictureOf(bytes: Uint8Array, { requirement, corrections }: ChartAsk): ChartPicture {
+  const drawing = drawingOf(seenIn(recordingOf(bytes, requirement, corrections), requirement));
+  return { paths: chartPaths(drawing, PICTURE), events: drawing.events };
 }
 
 const readFile = ({ sha256, kind, recognised, pages }: OpenedFile): ReadFile => ({

@@ -4,7 +4,8 @@ import type { ReadingKind } from './reading-state';
 /** What the reading process is asked, and what it answers. */
 export interface ReadingRequest {
   id: number;
-  kind: ReadingKind;
+  /** To be read as that; of a chart that was judged, its picture may be asked for as well. */
+  kind: ReadingKind | 'chart_picture';
   name: string;
   bytes: Uint8Array;
   /** What a chart is held against. */

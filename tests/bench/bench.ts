@@ -1,33 +1,19 @@
-import { spawn } from 'node:child_process';
-
-import { encode } from 'next-auth/jwt';
 import pg from 'pg';
 
-import { createDatabase, dropDatabase } from '@/db/cluster';
-import { prepareDatabase } from '@/lib/stack/prepare-database';
-import { env } from '@/lib/env';
-
+import { makeOwnDatabase, signedIn, startWeb } from './built-server';
 import { dispatches } from './dispatches';
 import { BATCHES, fill, LOTS } from './fill';
 import { measure, measureEach, type Measured } from './measure';
 
-const PORT = 7600;
-const BASE = `http://localhost:${PORT}`;
-const COOKIE = 'authjs.session-token';
-const DATABASE = 'lotwright_bench';
+const BASE = 'http://localhost:7600';
 
 /**
  * Fills a database of its own and measures the built web server on it: pages beside a bare dynamic page, lists beside
  * a bare `select 1` route, all in one run. Figures of another run or machine are not to be compared; ratios are.
  */
 async function main(): Promise<void> {
-  const superUrl = urlOf(env.DATABASE_OWNER_URL, 'postgres', 'postgres');
-  await dropDatabase(superUrl, DATABASE);
-  await createDatabase(superUrl, DATABASE);
-  const ownerUrl = urlOf(env.DATABASE_OWNER_URL, null, DATABASE);
-  const appUrl = urlOf(env.DATABASE_URL, null, DATABASE);
-  await prepareDatabase(ownerUrl);
-  const client = new pg.Client({ connectionString: ownerUrl });
+  const database = await makeOwnDatabase('lotwright_bench');
+  const client = new pg.Client({ connectionString: database.ownerUrl });
   await client.connect();
   console.log(
     `Filling ${LOTS.toLocaleString('en-US')} lots and ${BATCHES.toLocaleString('en-US')} batches …`,
@@ -35,25 +21,9 @@ async function main(): Promise<void> {
   const filled = await fill(client);
   await client.end();
 
-  const server = spawn(process.execPath, ['node_modules/next/dist/bin/next', 'start', '-p', String(PORT)], {
-    env: {
-      ...process.env,
-      DATABASE_URL: appUrl,
-      DATABASE_OWNER_URL: ownerUrl,
-      APP_URL: BASE,
-      NODE_ENV: 'production',
-      LOG_LEVEL: 'warn',
-    },
-    stdio: ['ignore', 'ignore', 'inherit'],
-  });
+  const server = await startWeb(database, BASE);
   try {
-    await untilUp();
-    const token = await encode({
-      token: { claims: { kind: 'person', userId: filled.userId, sessionVersion: 1, shopId: filled.shopId } },
-      secret: env.AUTH_SECRET,
-      salt: COOKIE,
-    });
-    const headers = { cookie: `${COOKIE}=${token}` };
+    const headers = await signedIn(filled);
     const barePage = await measure('bare dynamic page', `${BASE}/dev/bare`);
     const bareRoute = await measure('bare select 1 route', `${BASE}/api/dev/bare`);
     const pages = [
@@ -68,7 +38,7 @@ async function main(): Promise<void> {
     ];
     const dispatched = await measureEach(
       'dispatch, one after the other',
-      await dispatches(appUrl, filled, { base: BASE, headers }),
+      await dispatches(database.appUrl, filled, { base: BASE, headers }),
     );
     print([
       [barePage, null],
@@ -79,7 +49,7 @@ async function main(): Promise<void> {
     ]);
   } finally {
     server.kill('SIGTERM');
-    await dropDatabase(superUrl, DATABASE).catch(() => undefined);
+    await database.drop();
   }
 }
 
@@ -95,22 +65,6 @@ function print(rows: readonly (readonly [Measured, Measured | null])[]): void {
       `${one.name.padEnd(32)}${figures}   ${bare ? `${(one.p50 / bare.p50).toFixed(2)} × ${bare.name}` : ''}`,
     );
   }
-}
-
-function urlOf(given: string, user: string | null, database: string): string {
-  const url = new URL(given);
-  if (user !== null) url.username = user;
-  url.pathname = `/${database}`;
-  return url.href;
-}
-
-async function untilUp(): Promise<void> {
-  for (let tries = 0; tries < 120; tries++) {
-    const response = await fetch(`${BASE}/api/health`).catch(() => null);
-    if (response?.ok) return;
-    await new Promise((resolve) => setTimeout(resolve, 250));
-  }
-  throw new Error('The web server did not come up. Is it built? Run npm start once.');
 }
 
 await main();

@@ -39,15 +39,48 @@ export async function measureEach(name: string, calls: readonly (() => Promise<v
   };
 }
 
-function load(url: string, headers: Record<string, string>, duration: number): Promise<number[]> {
+/**
+ * Times in ms of the calls at a steady rate, as a shop's screens make them, for as long as `goesOn` says so.
+ *
+ * @param perSecond calls a second, all connections together.
+ * @param rounds the most rounds of ten seconds each.
+ */
+export async function measureWhile(
+  name: string,
+  {
+    url,
+    headers,
+    perSecond,
+    rounds,
+  }: { url: string; headers: Record<string, string>; perSecond: number; rounds: number },
+  goesOn: () => Promise<boolean>,
+): Promise<Measured> {
+  const times: number[] = [];
+  let seconds = 0;
+  do {
+    times.push(...(await load(url, headers, MEASURED_S, perSecond)));
+    seconds += MEASURED_S;
+  } while (seconds < rounds * MEASURED_S && (await goesOn()));
+  return { name, ...percentiles(times), perSecond: Math.round(times.length / seconds) };
+}
+
+function load(
+  url: string,
+  headers: Record<string, string>,
+  duration: number,
+  perSecond?: number,
+): Promise<number[]> {
   return new Promise((resolve, reject) => {
     const times: number[] = [];
-    const run = autocannon({ url, headers, connections: CONNECTIONS, duration }, (error, result) => {
-      if (error) reject(error instanceof Error ? error : new Error(String(error)));
-      else if (result.non2xx > 0 || result.errors > 0)
-        reject(new Error(`${url}: ${result.non2xx} refused, ${result.errors} failed`));
-      else resolve(times);
-    });
+    const run = autocannon(
+      { url, headers, connections: CONNECTIONS, duration, ...(perSecond && { overallRate: perSecond }) },
+      (error, result) => {
+        if (error) reject(error instanceof Error ? error : new Error(String(error)));
+        else if (result.non2xx > 0 || result.errors > 0)
+          reject(new Error(`${url}: ${result.non2xx} refused, ${result.errors} failed`));
+        else resolve(times);
+      },
+    );
     run.on('response', (_client, _status, _bytes, ms) => times.push(ms));
   });
 }

@@ -45,6 +45,15 @@ test('an invoice is read into the form it is entered in, each line beside the or
     discrepancies: [],
   });
   expect(reading.lines[0]?.lineId).not.toBeNull();
+  expect(reading.lines.map(({ field }) => field)).toEqual(['lines[0]', 'freight']);
+  const placed = reading.facts.map(({ field }) => field);
+  for (const field of ['invoice_number', 'total', 'lines[0].unit_price', 'freight'])
+    expect(placed).toContain(field);
+  for (const { box, page } of reading.facts) {
+    const on = reading.pages.find(({ number }) => number === page);
+    expect(box[2]).toBeLessThanOrEqual(on?.width ?? 0);
+    expect(box[3]).toBeLessThanOrEqual(on?.height ?? 0);
+  }
 });
 
 test('a sum that does not add up and another order’s number are named', async () => {

@@ -4,7 +4,7 @@ import sharp from 'sharp';
 import { describe, expect, test } from 'vitest';
 import { openFile, type OpenOptions } from '@/lib/evidence/open/open-file';
 import { USUAL_LIMITS } from '@/lib/evidence/open/limits';
-import { makeLockedPdf, makePdf } from './make-pdf';
+import { makeLockedPdf, makePdf, pdfWithStream } from './make-pdf';
 
 const bytesOf = (text: string) => new Uint8Array(Buffer.from(text, 'latin1'));
 const refusal = (bytes: Uint8Array, options: OpenOptions) =>
@@ -14,19 +14,6 @@ const refusal = (bytes: Uint8Array, options: OpenOptions) =>
   );
 const certificate = () =>
   makePdf((p, font) => p.drawText('Certificate of conformance', { x: 72, y: 700, size: 12, font }));
-
-/** A PDF whose page content is `stream`, described by `entries`. */
-function withStream(stream: Buffer, entries: string): Uint8Array {
-  return new Uint8Array(
-    Buffer.concat([
-      Buffer.from(
-        `%PDF-1.4\n1 0 obj\n<< /Type /Catalog /Pages 2 0 R >>\nendobj\n2 0 obj\n<< /Type /Pages /Kids [3 0 R] /Count 1 >>\nendobj\n3 0 obj\n<< /Type /Page /Parent 2 0 R /MediaBox [0 0 612 792] /Contents 4 0 R >>\nendobj\n4 0 obj\n<< /Length ${stream.length} ${entries} >>\nstream\n`,
-      ),
-      stream,
-      Buffer.from('\nendstream\nendobj\ntrailer\n<< /Root 1 0 R >>\n%%EOF\n'),
-    ]),
-  );
-}
 
 describe('a file that cannot be read says why', () => {
   test.each([
@@ -89,13 +76,15 @@ describe('a file that cannot be read says why', () => {
 
   test('streams that unpack without end, also when packed twice', async () => {
     const megabytes = deflateSync(Buffer.alloc(300 * 1024 * 1024), { level: 9 });
-    expect(await refusal(withStream(megabytes, '/Filter /FlateDecode'), { name: 'a.pdf' })).toBe('too_large');
-    const twice = deflateSync(megabytes, { level: 9 });
-    expect(twice.length).toBeLessThan(64 * 1024);
-    expect(await refusal(withStream(twice, '/Filter [/FlateDecode /FlateDecode]'), { name: 'a.pdf' })).toBe(
+    expect(await refusal(pdfWithStream(megabytes, '/Filter /FlateDecode'), { name: 'a.pdf' })).toBe(
       'too_large',
     );
-    const picture = withStream(Buffer.from('x'), '/Subtype /Image /Width 30000 /Height 30000');
+    const twice = deflateSync(megabytes, { level: 9 });
+    expect(twice.length).toBeLessThan(64 * 1024);
+    expect(
+      await refusal(pdfWithStream(twice, '/Filter [/FlateDecode /FlateDecode]'), { name: 'a.pdf' }),
+    ).toBe('too_large');
+    const picture = pdfWithStream(Buffer.from('x'), '/Subtype /Image /Width 30000 /Height 30000');
     expect(await refusal(picture, { name: 'a.pdf' })).toBe('too_large');
   });
 

@@ -72,3 +72,16 @@ export function makeLockedPdf(password: string, words: string): Uint8Array {
   file += `xref\n0 7\n0000000000 65535 f \n${table}trailer\n<< /Size 7 /Root 1 0 R /Encrypt 6 0 R /ID [<${hex}> <${hex}>] >>\nstartxref\n${file.length}\n%%EOF\n`;
   return new Uint8Array(Buffer.from(file, 'latin1'));
 }
+
+/** A PDF whose page content is `stream`, described by `entries`. */
+export function pdfWithStream(stream: Buffer, entries: string): Uint8Array {
+  return new Uint8Array(
+    Buffer.concat([
+      Buffer.from(
+        `%PDF-1.4\n1 0 obj\n<< /Type /Catalog /Pages 2 0 R >>\nendobj\n2 0 obj\n<< /Type /Pages /Kids [3 0 R] /Count 1 >>\nendobj\n3 0 obj\n<< /Type /Page /Parent 2 0 R /MediaBox [0 0 612 792] /Contents 4 0 R >>\nendobj\n4 0 obj\n<< /Length ${stream.length} ${entries} >>\nstream\n`,
+      ),
+      stream,
+      Buffer.from('\nendstream\nendobj\ntrailer\n<< /Root 1 0 R >>\n%%EOF\n'),
+    ]),
+  );
+}
