@@ -11,6 +11,8 @@ import { shopOf, type Ctx } from '@/lib/auth/context';
 import { calendarDay } from '@/lib/day-words';
 import type { SeenCertificate } from '@/lib/evidence/certificate/certificate';
 
+import { comparisonTablesOf } from '@/lib/reference/tables-of';
+
 import type { CertificateReading } from './contract';
 import { findReading } from './find-reading';
 import { KeptCertificates, type KeptPage } from './kept-reading';
@@ -60,6 +62,7 @@ export async function getCertificateReading(
     others,
     seen: await seenBefore(ctx, certificate, stated.certificate_number),
     today: await todayOf(ctx),
+    tables: await comparisonTablesOf(ctx),
   });
   return {
     ...base,

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 
 import { ALLOYS, type Alloy } from '@/lib/trade/alloys/alloy';
+import { HARDNESS_SCALES } from '@/lib/trade/hardness/hardness-table';
 import { PRODUCT_FORMS } from '@/lib/trade/process';
 import { TEMPERS } from '@/lib/trade/tempers/temper';
 
@@ -37,3 +38,12 @@ export const form = z.enum(PRODUCT_FORMS);
 export const specifications = listOf(words(60));
 /** Ticked, or left empty. */
 export const ticked = z.literal(true);
+
+const hardness = bare(0, 1100).exactOptional();
+/** One line of a hardness conversion. */
+export const byScale = z.strictObject({
+  ...{ HRC: hardness, HRB: hardness, HRE: hardness, HRA: hardness },
+  ...{ HR15N: hardness, HV: hardness, HBW: hardness, HB500: hardness },
+  tensileKsi: ksi().exactOptional(),
+  inBrackets: listOf(z.enum(HARDNESS_SCALES)).exactOptional(),
+});
