@@ -9,6 +9,7 @@ import { PERMISSIONS } from '@/lib/auth/permissions';
 import { SHOP_ROLES, type Role } from '@/lib/auth/roles';
 import { inOwningShop } from '@/lib/files/in-owning-shop';
 import { newId } from '@/lib/ids';
+import { enterOwnTable } from '@/lib/reference/enter-own-table';
 import { sendPaper } from '@/lib/portal/send-paper';
 import { addToIntake } from '@/lib/readings/settle-intake';
 
@@ -72,6 +73,12 @@ beforeAll(async () => {
     tokenHash: randomUUID(),
     createdAt: new Date(),
   });
+  await shopA.as(['lead'], (ctx) =>
+    enterOwnTable(ctx, {
+      ...{ tableId: 'quench-delays', title: 'Own procedure', edition: 'issue 1', clause: '2', follows: null },
+      ...{ heads: ['from (in)', 'max (s)'], cells: [['0', '4']] },
+    }),
+  );
   known = { ...(await idsOf(shopA)), batchId: batch.id, tableId: 'quench-delays' };
 }, 120_000);
 

@@ -45,7 +45,12 @@ test.each([
   ['a word for a figure', 'soak-times', { 'up to (in)': 'thin' }, /figure from 0 to 40 in/],
   ['a decimal comma', 'soak-times', { 'up to (in)': '0,5' }, /0,5 is not what stands here/],
   ['a range the wrong way round', 'anneals', { 'hours (h)': '3 to 2' }, /below the first/],
-  ['an alloy that no table knows', 'anneals', { alloys: '6061; 9999' }, /^9999 is not what stands here.*2024, 2117/],
+  [
+    'an alloy that no table knows',
+    'anneals',
+    { alloys: '6061; 9999' },
+    /^9999 is not what stands here.*2024, 2117/,
+  ],
   ['an empty cell', 'anneals', { 'hold (°F)': '' }, /Is empty/],
   [
     'a cell of another kind of row',
