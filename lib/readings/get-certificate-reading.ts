@@ -8,6 +8,7 @@ import { shopOf, type Ctx } from '@/lib/auth/context';
 import { calendarDay } from '@/lib/day-words';
 import type { StatedCertificate } from '@/lib/evidence/certificate/certificate';
 import type { Page } from '@/lib/evidence/page';
+import { comparisonTablesOf } from '@/lib/reference/tables-of';
 
 import { asOfBatch } from './as-of-batch';
 import type { CertificateReading } from './contract';
@@ -74,6 +75,7 @@ export async function getCertificateReading(
     orders: others,
     seen: await seenBefore(ctx, { certificate, sha256, stated: corrected, place, batch }),
     today: await todayOf(ctx),
+    tables: await comparisonTablesOf(ctx),
   });
   return {
     ...base,

@@ -6,6 +6,7 @@ import type {
 } from '@/lib/evidence/certificate/certificate';
 import { compare, type Comparison } from '@/lib/evidence/certificate/compare/compare';
 import { pairLines, type LinePair, type PairedBy } from '@/lib/evidence/certificate/compare/pair-lines';
+import type { ComparisonTables } from '@/lib/evidence/certificate/compare/tables';
 import type { Fact } from '@/lib/evidence/fact';
 import type { Order, Requirements } from '@/lib/evidence/order';
 import type { OpenedFile } from '@/lib/evidence/page';
@@ -50,6 +51,8 @@ interface Compared {
   seen: readonly SeenCertificate[];
   /** `YYYY-MM-DD` */
   today: string;
+  /** The published ones where nothing is said. */
+  tables?: ComparisonTables;
 }
 
 const VERDICT = {

@@ -37,7 +37,9 @@ export function readCell(text: string, shapes: readonly Shape[]): Read {
     if (value !== undefined) return { ok: true, value };
   }
   const right = [...new Set(shapes.map(whatIsRight))].join(', or ');
-  return { ok: false, message: `${text.slice(0, 60)} is not what stands here. Enter ${right}.` };
+  const { items: each } = shapes.find(isList) ?? {};
+  const wrong = each ? itemsOf(text).find((one) => valueIn(one, each) === undefined) : text;
+  return { ok: false, message: `${(wrong ?? text).slice(0, 60)} is not what stands here. Enter ${right}.` };
 }
 
 function valueIn(text: string, shape: Shape): unknown {

@@ -1,7 +1,8 @@
 import { z } from 'zod';
 
 import { ALLOYS, type Alloy } from '@/lib/trade/alloys/alloy';
-import { PROCESSES, PRODUCT_FORMS } from '@/lib/trade/process';
+import { HARDNESS_SCALES } from '@/lib/trade/hardness/hardness-table';
+import { PRODUCT_FORMS } from '@/lib/trade/process';
 import { TEMPERS } from '@/lib/trade/tempers/temper';
 
 /** A figure with its unit and the range in which it can be meant; outside of it, it was typed wrongly. */
@@ -15,7 +16,6 @@ export const degreesF = (most = 200) => figure('°F', 0, most);
 export const seconds = () => figure('s', 0, 600);
 export const minutes = (most = 6000) => figure('min', 0, most);
 export const hours = (most = 5000) => figure('h', 0, most);
-export const days = () => figure('days', 0, 3650);
 export const ksi = () => figure('ksi', 0, 400);
 export const mpa = () => figure('MPa', 0, 3000);
 export const hrc = () => figure('HRC', 0, 70);
@@ -35,7 +35,15 @@ export const alloy = z.enum(Object.keys(ALLOYS) as [Alloy, ...Alloy[]]);
 export const alloys = listOf(alloy);
 export const temper = z.enum(TEMPERS);
 export const form = z.enum(PRODUCT_FORMS);
-export const process = z.enum(PROCESSES);
 export const specifications = listOf(words(60));
 /** Ticked, or left empty. */
 export const ticked = z.literal(true);
+
+const hardness = bare(0, 1100).exactOptional();
+/** One line of a hardness conversion. */
+export const byScale = z.strictObject({
+  ...{ HRC: hardness, HRB: hardness, HRE: hardness, HRA: hardness },
+  ...{ HR15N: hardness, HV: hardness, HBW: hardness, HB500: hardness },
+  tensileKsi: ksi().exactOptional(),
+  inBrackets: listOf(z.enum(HARDNESS_SCALES)).exactOptional(),
+});

@@ -2,6 +2,7 @@ import { and, isNull } from 'drizzle-orm';
 
 import { referenceTables } from '@/db/schema/reference';
 import type { Ctx } from '@/lib/auth/context';
+import { PUBLISHED, type ComparisonTables } from '@/lib/evidence/certificate/compare/tables';
 
 import { BATCH_TABLES, type BatchTables } from './batch-tables';
 import { inForce } from './in-force';
@@ -11,6 +12,12 @@ import { ownTables, type OwnEntry } from './own-table';
 export async function tablesOf(ctx: Ctx): Promise<BatchTables> {
   const own = await readOwnEntries(ctx);
   return own.length === 0 ? BATCH_TABLES : inForce(BATCH_TABLES, ownTables(own));
+}
+
+/** What certificates of the shop are compared by. */
+export async function comparisonTablesOf(ctx: Ctx): Promise<ComparisonTables> {
+  const own = await readOwnEntries(ctx);
+  return own.length === 0 ? PUBLISHED : inForce(PUBLISHED, ownTables(own));
 }
 
 /** The shop's own editions that are in force. */

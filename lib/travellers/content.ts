@@ -98,7 +98,7 @@ export const TravellerContent = Stated.extend({
   /** Contents from before loads were planned have none; a process without a furnace has null. */
   furnaceLoads: TravellerLoads.nullish(),
   samples: z.array(SampleOfLines).optional(),
-  /** The tables and editions that loads and samples were read from, requirements proposed, overridden checks made by. */
+  /** The tables and editions that its cautions, loads, samples, proposed requirements and overridden checks were read from. */
   tables: z.array(TableReferenceShape).optional(),
   /** Blockers that were let pass, with who did and why. */
   overrides: z.array(

@@ -9,7 +9,8 @@ import { readCheckFacts, readOverrides } from '@/lib/batches/read-check-facts';
 import { specificationWords } from '@/lib/batches/step-asked';
 import { env } from '@/lib/env';
 import { notFound } from '@/lib/errors';
-import type { TableReference } from '@/lib/trade/table';
+import { referenceTo, type TableReference } from '@/lib/trade/table';
+import { CAUTIONS } from '@/lib/trade/tables/cautions';
 
 import { cautionsOf } from './cautions';
 import { paperOf, TravellerContent, type OrderContent, type Paper } from './content';
@@ -135,7 +136,7 @@ async function readLoads(
   };
 }
 
-/** Each table and edition once: what loads and samples were read from, and what requirements and overrides record. */
+/** Each table and edition once: what cautions, loads and samples were read from, and what requirements and overrides record. */
 async function readTables(
   ctx: Ctx,
   batchId: string,
@@ -147,7 +148,7 @@ async function readTables(
     .where(eq(requirements.batchId, batchId))
     .orderBy(asc(requirements.seq), asc(requirements.id));
   const passed = await readOverrides(ctx, batchId);
-  const all = [...ofLoads, ...asked, ...passed].flatMap((one) =>
+  const all = [referenceTo(CAUTIONS), ...ofLoads, ...asked, ...passed].flatMap((one) =>
     'table' in one ? one : (one.readFrom ?? []),
   );
   const once = new Map(

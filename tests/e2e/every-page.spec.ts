@@ -53,6 +53,9 @@ const LEAD = [
   '/stock/places',
   '/settings/account',
   '/settings/tokens',
+  '/settings/tables',
+  '/settings/tables/quench-delays',
+  '/settings/tables/ordering-information',
   '/api-docs',
 ];
 const INSPECTOR = [

@@ -57,6 +57,43 @@ test('a mixed batch takes two loads, a clad lot is on its last treatment, steel 
   expect(refused.status()).toBe(409);
 });
 
+/** A shop's own edition of a table, from a spreadsheet to the check that cites it. */
+test('a quench delay from the own procedure is entered, cited by the batch, and withdrawn again', async ({
+  person,
+}) => {
+  test.setTimeout(300_000);
+  const owner = await person('Owner');
+  const { page } = owner;
+  await owner.signIn('owner@larkspur.test');
+
+  await owner.goTo('/settings/tables');
+  await owner.press(page.getByRole('link', { name: 'Maximum quench delay of wrought aluminium' }));
+  const chosen = page.getByLabel(/CSV file of the table|Choose the file again/);
+  await owner.gives(chosen, 'delays.csv', Buffer.from('from (in),max (s)\r\nthin,6\r\n'));
+  await owner.sees(page.getByText('1 of 1 row is wrong.'));
+  await owner.sees(page.getByText(/thin is not what stands here/));
+  await owner.gives(chosen, 'delays.csv', Buffer.from('from (in),max (s)\r\n0,4\r\n0.032,6\r\n'));
+  await owner.sees(page.getByText(/2 rows, nothing is wrong/));
+  await owner.type(page.getByLabel('Specification'), 'Own procedure HT-12');
+  await owner.type(page.getByLabel('Edition'), 'issue 3');
+  await owner.type(page.getByLabel('Clause'), 'Table 2');
+  await owner.press(page.getByRole('button', { name: 'Enter 2 rows' }));
+  await owner.sees(page.getByText('Your own: Own procedure HT-12, issue 3, Table 2.'));
+  await owner.looks('own-table');
+
+  const batch = await batchOf(owner, SOLUTION, [{ alloy: '2024', madeCondition: 'O', endCondition: 'T42' }]);
+  await owner.goTo(`/batches/${batch}`);
+  await owner.sees(page.getByText(/Into the quench within 6 s/));
+  await owner.sees(page.getByText(/Own procedure HT-12, issue 3, Table 2 \(entered by/).first());
+
+  await owner.goTo('/settings/tables/quench-delays');
+  await owner.press(page.getByRole('button', { name: 'Withdraw your edition' }));
+  await owner.press(page.getByRole('button', { name: 'Withdraw the edition' }));
+  await owner.sees(page.getByText(/^Tables of the trade\. As published/));
+  await owner.goTo(`/batches/${batch}`);
+  await owner.sees(page.getByText(/Into the quench within 10 s/));
+});
+
 async function ask(lead: Person, path: string, data: object): Promise<{ id: string; version: number }> {
   const answer = await lead.page.request.post(`/api${path}`, { data });
   expect(answer.ok(), await answer.text()).toBe(true);

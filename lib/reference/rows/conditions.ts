@@ -3,12 +3,26 @@ import { z } from 'zod';
 import { HARDNESS_SCALES } from '@/lib/trade/hardness/hardness-table';
 import { ACCEPTANCE } from '@/lib/trade/tables/acceptance';
 import { DENSITIES } from '@/lib/trade/tables/densities';
+import { HARDNESS_ALUMINIUM } from '@/lib/trade/tables/hardness-aluminium';
 import { OLD_NAMES } from '@/lib/trade/tables/old-names';
 import { TEMPER_TRANSITIONS } from '@/lib/trade/tables/temper-transitions';
 import { TEMPER_DESIGNATIONS } from '@/lib/trade/tables/tempers';
 
 import { replaceable } from '../replaceable';
-import { alloys, bare, form, iacs, listOf, percent, span, temper, ticked, whole, words } from '../row-fields';
+import {
+  alloys,
+  bare,
+  byScale,
+  form,
+  iacs,
+  listOf,
+  percent,
+  span,
+  temper,
+  ticked,
+  whole,
+  words,
+} from '../row-fields';
 
 const operation = z.enum([
   'solution_heat_treat',
@@ -132,4 +146,5 @@ export const CONDITION_ROWS = [
       kind: z.enum(['acceptance', 'worked_example']),
     }),
   ),
+  replaceable(HARDNESS_ALUMINIUM, byScale),
 ];

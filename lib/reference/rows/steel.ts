@@ -1,12 +1,14 @@
 import { z } from 'zod';
 
-import { HARDNESS_SCALES } from '@/lib/trade/hardness/hardness-table';
 import { HEATED_WORK } from '@/lib/trade/pyrometry/class-needed';
 import { FURNACE_CLASSES } from '@/lib/trade/pyrometry/furnace-class';
 import { BAKE_HOURS_BY_STRENGTH } from '@/lib/trade/tables/bake-hours-by-strength';
 import { EMBRITTLEMENT_RULES } from '@/lib/trade/tables/embrittlement-rules';
 import { FURNACE_CLASSES_NEEDED } from '@/lib/trade/tables/furnace-classes-needed';
+import { HARDNESS_STEEL_BRINELL } from '@/lib/trade/tables/hardness-steel-brinell';
+import { HARDNESS_STEEL_HRB } from '@/lib/trade/tables/hardness-steel-hrb';
 import { HARDNESS_STEEL_HRC } from '@/lib/trade/tables/hardness-steel-hrc';
+import { HARDNESS_STEEL_OTHER_LIST } from '@/lib/trade/tables/hardness-steel-other-list';
 import { PH_STEEL_CONDITIONS } from '@/lib/trade/tables/ph-steel-conditions';
 import { STEEL_TEMPERING, TEMPER_BANDS } from '@/lib/trade/tables/steel-tempering';
 import { STEEL_WINDOWS } from '@/lib/trade/tables/steel-windows';
@@ -14,6 +16,7 @@ import { STEEL_WINDOWS } from '@/lib/trade/tables/steel-windows';
 import { replaceable } from '../replaceable';
 import {
   bare,
+  byScale,
   degreesF,
   fahrenheit,
   hours,
@@ -34,14 +37,6 @@ const revisions = z.union([
   z.strictObject({ letters: listOf(words(12)) }),
   z.strictObject({ fromYear: whole(1900, 2100).exactOptional(), toYear: whole(1900, 2100).exactOptional() }),
 ]);
-
-const hardness = bare(0, 1100).exactOptional();
-const byScale = z.strictObject({
-  ...{ HRC: hardness, HRB: hardness, HRE: hardness, HRA: hardness },
-  ...{ HR15N: hardness, HV: hardness, HBW: hardness, HB500: hardness },
-  tensileKsi: ksi().exactOptional(),
-  inBrackets: listOf(z.enum(HARDNESS_SCALES)).exactOptional(),
-});
 
 /** Heat treatment of steel, its hardness, and hydrogen in it. */
 export const STEEL_ROWS = [
@@ -88,6 +83,9 @@ export const STEEL_ROWS = [
     }),
   ),
   replaceable(HARDNESS_STEEL_HRC, byScale),
+  replaceable(HARDNESS_STEEL_HRB, byScale),
+  replaceable(HARDNESS_STEEL_BRINELL, byScale),
+  replaceable(HARDNESS_STEEL_OTHER_LIST, byScale),
   replaceable(
     EMBRITTLEMENT_RULES,
     z.strictObject({

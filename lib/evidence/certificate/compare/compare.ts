@@ -18,6 +18,7 @@ import { accountsForAllPieces, addsUp } from './quantity-checks';
 import { isQuenched } from './quench-checks';
 import { conducts, isStrongEnough, isThickEnough } from './reading-checks';
 import { followsSpecification, isOrderedProcess } from './specification-checks';
+import { PUBLISHED, type ComparisonTables } from './tables';
 
 export interface Comparison {
   readonly verdicts: RequirementVerdict[];
@@ -40,6 +41,8 @@ export interface ComparisonInput {
   readonly seen?: readonly SeenCertificate[];
   /** `YYYY-MM-DD` */
   readonly today: string;
+  /** The published ones where nothing is said. */
+  readonly tables?: ComparisonTables;
 }
 
 /** Asked of every certificate, whatever was ordered. */
@@ -89,6 +92,7 @@ export function compare({
   others = [],
   seen = [],
   today,
+  tables = PUBLISHED,
 }: ComparisonInput): Comparison {
   const open = given === null ? orders : [given, ...orders.filter(({ batch }) => batch !== given.batch)];
   const match = matchOrder(stated, open, { isRecognised: file.recognised });
@@ -102,6 +106,7 @@ export function compare({
       seen,
       pages: pagesOf(stated, file),
       isRecognised: file.recognised,
+      tables,
     });
   // What follows from the order says nothing of a certificate that is for another one.
   const own = compared?.isOfOtherOrder ? null : order;
@@ -128,7 +133,7 @@ function withoutOrder(candidates: readonly Order[]): string[] {
   ];
 }
 
-type Sides = Pick<Compared, 'stated' | 'orders' | 'others' | 'seen' | 'pages' | 'isRecognised'>;
+type Sides = Pick<Compared, 'stated' | 'orders' | 'others' | 'seen' | 'pages' | 'isRecognised' | 'tables'>;
 
 /** Those that something of this certificate was read on; a file may hold several. */
 function pagesOf({ facts }: StatedCertificate, { pages }: Pick<OpenedFile, 'pages'>): OpenedFile['pages'] {

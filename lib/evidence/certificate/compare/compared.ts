@@ -3,6 +3,7 @@ import type { Page } from '../../page';
 import type { SeenCertificate, StatedCertificate } from '../certificate';
 import type { Outcome } from './outcome';
 import type { PairedLines } from './pair-lines';
+import type { ComparisonTables } from './tables';
 
 /** A certificate beside the order that it is compared with. */
 export interface Compared {
@@ -13,6 +14,8 @@ export interface Compared {
   readonly others: readonly StatedCertificate[];
   readonly seen: readonly SeenCertificate[];
   readonly isRecognised: boolean;
+  /** Those in force where the order was made. */
+  readonly tables: ComparisonTables;
   /** Of the file that the certificate stands on. */
   readonly pages: readonly Page[];
   readonly pairs: PairedLines;

@@ -13,7 +13,6 @@ import { sideOf } from './range';
 import { conductivityUnit, hardnessName, hardnessScale } from './reading-units';
 import { readingsOf } from './readings-of';
 import { sayList, sayNumber, sayRange } from './say';
-import { TABLES } from './tables';
 import { alloyIn, saysClad, tempersIn } from './tempers-in';
 
 const HARDNESS = /^hardness/;
@@ -30,12 +29,12 @@ export const isHardEnough: Check = (compared) => {
   if (readings.length === 0) return [notStated(asked)];
   const own = readings.filter(({ unit }) => unit !== null && hardnessName(unit) === scale);
   // Where it was read in the scale asked for, that decides.
-  return (own.length > 0 ? own : readings).map((reading) => hardnessOutcome(reading, order, asked));
+  return (own.length > 0 ? own : readings).map((reading) => hardnessOutcome(reading, compared, asked));
 };
 
 function hardnessOutcome(
   { values, unit }: Reading,
-  order: Order,
+  { order, tables }: Compared,
   asked: { requirement: string; ordered: string },
 ): Outcome {
   const range = order.requirements.hardness ?? { scale: '' };
@@ -50,7 +49,7 @@ function hardnessOutcome(
           says,
           `The hardness is stated as ${says.stated} without a scale; in ${scale} it is out of ${asked.ordered}.`,
         );
-  if (hardnessName(unit) !== scale) return convertedOutcome({ values, unit }, order, says);
+  if (hardnessName(unit) !== scale) return convertedOutcome({ values, unit }, { order, tables }, says);
   return out === undefined
     ? meets(says, `${says.stated} lies within ${asked.ordered}.`)
     : wrong(
@@ -70,7 +69,7 @@ const alloyOf = ({ requirements, lines }: Order) =>
 
 function convertedOutcome(
   { values, unit }: { values: readonly number[]; unit: string },
-  order: Order,
+  { order, tables }: Pick<Compared, 'order' | 'tables'>,
   says: { requirement: string; ordered: string; stated: string },
 ): Outcome {
   const range = order.requirements.hardness ?? { scale: '' };
@@ -80,7 +79,7 @@ function convertedOutcome(
   const converted = values.map((value) => {
     if (from === null || to === null) return null;
     const read = readEachList(
-      TABLES.hardness,
+      tables.hardness,
       (table) => convertHardness(table, { material, from, value, to }),
       (answer) => answer.value,
     );
@@ -108,7 +107,7 @@ function convertedOutcome(
  * itself is judged by the order; clad metal has no published pair.
  */
 export const readsAsItsCondition: Check = (compared) => {
-  const { order } = compared;
+  const { order, tables } = compared;
   const { requirements, lines } = order;
   const alloy = alloyOf(order);
   const condition = tempersIn(requirements.temper_out ?? '').at(-1);
@@ -117,14 +116,14 @@ export const readsAsItsCondition: Check = (compared) => {
   );
   if (!alloy || !condition || (requirements.hardness && requirements.conductivity_pct_iacs)) return [];
   const asked = { alloy, condition, isClad };
-  const band = acceptanceOf(TABLES.acceptance, asked);
+  const band = acceptanceOf(tables.acceptance, asked);
   const hardnesses = hardnessesOf(compared);
   const conductivities = conductivitiesOf(compared);
   // Only the pair speaks.
   if (!band.ok || hardnesses.length === 0 || conductivities.length === 0) return [];
   const judged = hardnesses.flatMap((hardness) =>
     conductivities.map((percentIacs) => {
-      const verdict = judgeCondition(TABLES.acceptance, asked, { hardness, percentIacs });
+      const verdict = judgeCondition(tables.acceptance, asked, { hardness, percentIacs });
       return verdict.ok ? { ...verdict, hardnessRead: hardness, percentIacs } : null;
     }),
   );

@@ -5,7 +5,6 @@ import type { Temper } from '@/lib/trade/tempers/temper';
 import type { Order, OrderLine } from '../../order';
 import type { Check, Compared } from './compared';
 import { cannotTell, meets, notStated, wrong, type Outcome } from './outcome';
-import { TABLES } from './tables';
 import { alloyIn, formIn, saysClad, tempersIn } from './tempers-in';
 
 const orderedAlloy = ({ requirements }: Order, line?: OrderLine): string | null =>
@@ -76,7 +75,11 @@ export const isOrderedCondition: Check = (compared) => {
   const other = said.find((temper) => temper !== out && temper !== from);
   if (other !== undefined)
     return [
-      otherCondition({ ...asked, line: null, stated: other }, { out, given: other }, materialOf(order)),
+      otherCondition(
+        { ...asked, line: null, stated: other },
+        { out, given: other, tables: compared.tables },
+        materialOf(order),
+      ),
     ];
   if (said.includes(out))
     return [
@@ -115,27 +118,28 @@ function materialOf({ requirements, lines, class_type }: Order, line = lines[0])
 }
 
 /** A line's material names the condition before or after the work; any other is neither. */
-function conditionsOfLines({ pairs, order }: Compared, out: Temper): Outcome[] {
+function conditionsOfLines({ pairs, order, tables }: Compared, out: Temper): Outcome[] {
   return pairs.pairs.flatMap(({ ordered, stated }) => {
     const named = stated.flatMap(({ line }) => tempersIn(line.material ?? ''));
     const metal = materialOf(order, ordered);
     const before = tempersIn(ordered.material ?? '');
     const asked = { requirement: `condition ${out}`, line: ordered.line, ordered: out };
     const given = named.find((temper) => temper !== out && temper !== metal.from && !before.includes(temper));
-    if (given !== undefined) return [otherCondition({ ...asked, stated: given }, { out, given }, metal)];
+    if (given !== undefined)
+      return [otherCondition({ ...asked, stated: given }, { out, given, tables }, metal)];
     return named.includes(out) ? [meets({ ...asked, stated: out }, 'It is the condition ordered.')] : [];
   });
 }
 
 function otherCondition(
   asked: { requirement: string; line: number | null; ordered: string; stated: string | null },
-  { out, given }: { out: Temper; given: Temper },
+  { out, given, tables }: { out: Temper; given: Temper; tables: Compared['tables'] },
   { alloy, words, from }: Metal,
 ): Outcome {
   const says = `The order asks for ${out}, the certificate says ${given}.`;
   if (alloy === null || from === undefined) return wrong('wrong_temper', asked, says);
   const material = { alloy, form: formIn(words), clad: saysClad(words) };
-  const reach = explainCondition(TABLES.conditions, { material, from, to: given });
+  const reach = explainCondition(tables.conditions, { material, from, to: given });
   if (reach.ok && reach.reach === 'cannot_be_made')
     return wrong(
       'impossible_temper',

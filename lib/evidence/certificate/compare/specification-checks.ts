@@ -11,7 +11,7 @@ import { lookalikeKey, plainKey } from '../match/alike';
 import type { Check } from './compared';
 import { cannotTell, meets, notStated, wrong, type Outcome } from './outcome';
 import { revisionOrder } from './revision-order';
-import { TABLES } from './tables';
+import type { ComparisonTables } from './tables';
 
 interface Named {
   readonly body: SpecificationBody | null;
@@ -21,7 +21,7 @@ interface Named {
 }
 
 /** The work was done to the specification and the issue that were ordered. */
-export const followsSpecification: Check = ({ stated, order, isRecognised }) => {
+export const followsSpecification: Check = ({ stated, order, isRecognised, tables }) => {
   if (!order.spec) return [];
   const ordered = named(order.spec, order.spec_rev ?? null);
   const requirement = `specification ${ordered.number}`;
@@ -31,7 +31,7 @@ export const followsSpecification: Check = ({ stated, order, isRecognised }) => 
   const own = all.find(({ number }) => isSameNumber(number, ordered.number, isRecognised));
   const says = { ...asked, stated: sayStated(stated) };
   if (own) return [meets(says, 'It is the one ordered.'), ...revisionOutcome(order, ordered, own)];
-  return [otherSpecification(ordered.number, all, says)];
+  return [otherSpecification(ordered.number, all, { ...says, lineage: tables.lineage })];
 };
 
 const isSameNumber = (one: string, other: string, isRecognised: boolean): boolean =>
@@ -66,16 +66,19 @@ function allNamed(written: string, revision: string | null): Named[] {
 function otherSpecification(
   ordered: string,
   all: readonly Named[],
-  asked: { requirement: string; ordered: string; stated: string },
+  {
+    lineage,
+    ...asked
+  }: { requirement: string; ordered: string; stated: string } & Pick<ComparisonTables, 'lineage'>,
 ): Outcome {
-  const old = all.find(({ number }) => comesAfter(ordered, number));
+  const old = all.find(({ number }) => comesAfter(lineage, ordered, number));
   if (old)
     return wrong(
       'superseded_specification',
       asked,
       `The certificate names ${asked.stated}; ${ordered}, which was ordered, has taken its place.`,
     );
-  const later = all.find(({ number }) => comesAfter(number, ordered));
+  const later = all.find(({ number }) => comesAfter(lineage, number, ordered));
   const note = later ? ` It has taken the place of ${ordered}, but the order names the earlier one.` : '';
   return wrong(
     'wrong_specification',
@@ -85,8 +88,8 @@ function otherSpecification(
   );
 }
 
-function comesAfter(later: string, earlier: string): boolean {
-  const found = successorsOf(TABLES.lineage, earlier, null);
+function comesAfter(lineage: ComparisonTables['lineage'], later: string, earlier: string): boolean {
+  const found = successorsOf(lineage, earlier, null);
   return found.ok && found.successors.some(({ number }) => number === later);
 }
 

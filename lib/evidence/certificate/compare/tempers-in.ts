@@ -1,10 +1,9 @@
 import { ALLOYS, type Alloy } from '@/lib/trade/alloys/alloy';
 import { readMaterial } from '@/lib/trade/alloys/read-material';
 import type { ProductForm } from '@/lib/trade/process';
+import { TEMPER_DESIGNATIONS } from '@/lib/trade/tables/tempers';
 import { readTemper } from '@/lib/trade/tempers/read-temper';
 import type { Temper } from '@/lib/trade/tempers/temper';
-
-import { TABLES } from './tables';
 
 /** A temper behind an alloy's number, or by itself: the T42 of `2024-O to 2024-T42`, `-T6`, `TO T62 CONDITION`. */
 const CONDITION = /(?:^|[\s(/,-])([OFW]|AQ|T\d{1,4})(?=$|[\s)/,;.:-])/g;
@@ -15,7 +14,7 @@ export function tempersIn(written: string): Temper[] {
   return [...text.matchAll(CONDITION)].flatMap(({ 0: whole, 1: name = '' }) => {
     const isLetter = name.length === 1;
     if (isLetter && !whole.startsWith('-') && text.trim() !== name) return [];
-    const read = readTemper(TABLES.tempers, name);
+    const read = readTemper(TEMPER_DESIGNATIONS, name);
     return read.ok ? [read.stated.temper] : [];
   });
 }
@@ -23,7 +22,7 @@ export function tempersIn(written: string): Temper[] {
 /** The first alloy that the tables know in a text, wherever its words stand: `ALUM 2024-O SHEET`. */
 export function alloyIn(written: string): Alloy | null {
   for (const { index } of written.matchAll(/(?<![\w.])\w/g)) {
-    const read = readMaterial(TABLES.tempers, written.slice(index));
+    const read = readMaterial(TEMPER_DESIGNATIONS, written.slice(index));
     if (read.ok && ALLOYS[read.alloy] !== 'plating') return read.alloy;
   }
   return null;

@@ -1,6 +1,9 @@
 import { expect, test } from 'vitest';
 
+import { PUBLISHED } from '@/lib/evidence/certificate/compare/tables';
 import { Requirements, type Order } from '@/lib/evidence/order';
+import { inForce } from '@/lib/reference/in-force';
+import { ownTables } from '@/lib/reference/own-table';
 
 import { agreeing, compared, heatTreat, penetrant, plating } from './agreeing-certificate';
 
@@ -12,6 +15,36 @@ const verdictOf = (result: ReturnType<typeof compared>, requirement: string, lin
 const asking = (order: Order, requirements: object): Order => ({
   ...order,
   requirements: Requirements.parse({ ...order.requirements, ...requirements }),
+});
+
+test('a shop’s own table stands in for the published one, and is what is cited', () => {
+  const order = heatTreat({
+    requirements: { alloy: '7075', temper_in: 'O', temper_out: 'T6' },
+    class_type: null,
+    lines: [{ line: 1, part_number: '10-200', qty: 12, material: '7075-O' }],
+  });
+  const readings = [
+    { kind: 'hardness', unit: 'HRB', values: [88] },
+    { kind: 'conductivity', unit: '% IACS', values: [40.5] },
+  ];
+  const saidBy = (iacs: readonly [number, number]) => {
+    const own = ownTables([
+      {
+        ...{ id: 'entry', tableId: 'acceptance', enteredByName: 'Test Person' },
+        ...{ title: 'Own procedure', edition: 'issue 2', clause: '4.1' },
+        rows: [
+          {
+            ...{ alloy: '7075', conditions: ['T6'], kind: 'acceptance' },
+            ...{ iacs, hardness: [{ scale: 'HRB', min: 84 }] },
+          },
+        ],
+      },
+    ]);
+    const { discrepancies } = compared(order, { readings }, { tables: inForce(PUBLISHED, own) });
+    return discrepancies.find(({ code }) => code === 'readings_impossible_together')?.message ?? null;
+  };
+  expect(saidBy([30, 36])).toContain('Own procedure, issue 2, 4.1');
+  expect(saidBy([30, 42])).toBeNull();
 });
 
 test('every requirement of an order has its verdict, each line its own', () => {
