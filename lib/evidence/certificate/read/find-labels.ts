@@ -208,14 +208,18 @@ function steppedAt(
 ): { phrase: Phrase; end: number; step: Step } | null {
   const [step] = stepsIn(text.slice(at));
   if (!step || step.start !== 0) return null;
-  const gap = /^\s*(?:cycle|treatment|heat treat(?:ment)?|furnace|bake)?[\s\-–—,/:]{0,4}/i.exec(
-    text.slice(at + step.end),
-  );
+  const gap =
+    /^\s*(?:\([^)]{1,30}\)\s*)?(?:cycle|treatment|heat treat(?:ment)?|furnace|bake)?[\s\-–—,/:]{0,4}/i.exec(
+      text.slice(at + step.end),
+    );
   for (const skip of [
     gap?.[0].length ?? 0,
     /^[\s\-–—,/:]*/.exec(text.slice(at + step.end))?.[0].length ?? 0,
   ]) {
-    const found = phraseAt(plain, at + step.end + skip);
+    const any = phraseAt(plain, at + step.end + skip);
+    // A finish is a coating, but of a step it is the end.
+    const ends = any?.phrase.key === 'process' && plain.startsWith('finish', at + step.end + skip);
+    const found = any && ends ? { ...any, phrase: { ...any.phrase, key: 'time_out' as const } } : any;
     if (found && ATTRIBUTES.has(found.phrase.key)) return { ...found, step: step.step };
   }
   return null;

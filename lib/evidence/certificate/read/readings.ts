@@ -202,6 +202,7 @@ const LIMITS: readonly RegExp[] = [
   /(?:\breq(?:uire(?:ment|d)s?|'?d|\.)?|\bspec(?:ification|ified|\.)?|\bmin(?:imum|\.)?|\bmax(?:imum|\.)?|\blimits?|\bnominal|\btarget|\bsoll\w*|\bavg\.?|\baverage|\bmean|\bmittel\w*|≥|≤|>=|<=|[<>])\s*(?:is|of|value|range|limits?)?\s*:?\s*(?:[A-Z%/µμ]{1,6}\s*)?\d+(?:[.,]\d+)?(?:\s*(?:-|–|to|\/)\s*\d+(?:[.,]\d+)?)?\s*(?:[%A-Za-zµμ/°]{1,10})?(?:\s*(?:min|max)\w*)?/giu,
   /\d+(?:[.,]\d+)?\s*(?:[%A-Za-zµμ/]{0,10})\s*(?:\bmin(?:imum)?\b|\bmax(?:imum)?\b|\breq(?:uired|'?d)\b)\.?(?!\s*[:=])/giu,
   /\b(?:specimens?|samples?|test\s?(?:piece)?s?|pieces?|pc|no\.?|#|reading|probe|s\/?n)\s*(?:no\.?\s*|#\s*)?\d{1,3}\s*[:.)=]/giu,
+  /\d+\s*of\s*\d+(?:\s*(?:pcs|pieces|tested|parts|samples|specimens))?/giu,
   /\d+\s*(?:readings?|places?|pcs?|pieces?|samples?|specimens?|tests?|kgf?|kg|gf|g|kHz|measurements?|locations?|parts?)\b/giu,
 ];
 

@@ -6,6 +6,7 @@ import type { Mark, Page } from '../../page';
 import { labelAtStart, labelsIn, type FoundLabel } from './find-labels';
 import type { LabelKey } from './labels';
 import { labelledTables } from './labelled-tables';
+import { labelsOnTop } from './labels-on-top';
 import { stepsIn, type Step } from './steps';
 
 /** A label and what may be its value, the likeliest first. */
@@ -44,7 +45,7 @@ export interface Sheet {
 }
 
 export function sheetOf(page: Page): Sheet {
-  const lines = linesOf(page);
+  const lines = labelsOnTop(linesOf(page));
   const tables = labelledTables(lines);
   return {
     page: page.number,
@@ -163,6 +164,19 @@ const startsLevel = ({ box }: Segment, below: Segment): boolean =>
 
 const closeBy = ({ box }: Segment, next: Segment): boolean => next.box[0] - box[2] < 4 * heightOf(box);
 
+/** "Method 1 Type 2" is what "Class" asks for, and no question. */
+const isPartOf = (first: FoundLabel, asking: FoundLabel): boolean =>
+  first.key === asking.key ||
+  (DESIGNATES.has(first.key) && (DESIGNATES.has(asking.key) || asking.key === 'condition'));
+const DESIGNATES: ReadonlySet<LabelKey> = new Set([
+  'class_type',
+  'method',
+  'sensitivity',
+  'ndt_type',
+  'personnel_level',
+  'specification',
+]);
+
 /** A label and a figure for it in one place; least and most belong to the readings before them. */
 const saysValue = ({ start, end, words }: FoundLabel, text: string): boolean =>
   start < 4 && !/^(?:min|max)/.test(words) && /\d/.test(text.slice(end));
@@ -173,7 +187,7 @@ function toTheRight({ label, labelled, index, place }: Place): Segment[] {
   for (const { segment, labels, isLabel } of (labelled[index] ?? []).slice(place + 1)) {
     // A label with its value in one place, without a colon: "Delay 7 s".
     const [first] = labels;
-    if (isLabel || (first && first.key !== label.key && saysValue(first, segment.text))) break;
+    if (isLabel || (first && !isPartOf(first, label) && saysValue(first, segment.text))) break;
     if (/[\p{L}\p{N}]/u.test(segment.text)) following.push(segment);
   }
   return following;
@@ -235,7 +249,11 @@ function headingAbove(lines: readonly Line[], index: number, segment: Segment): 
     // A choice of processes is no heading.
     if (!line || line.segments.filter(({ text }) => stepsIn(text).length > 0).length > 2) continue;
     for (const other of line.segments) {
-      if (other === segment || !isHeading(other, line, above === index ? segment : null)) continue;
+      if (
+        other === segment ||
+        !(isHeading(other, line, above === index ? segment : null) || beginsWithStep(other, line))
+      )
+        continue;
       if (answersLabel(other, line)) continue;
       const beside = above !== index && sharedAcross(other.box, segment.box) <= 0 && line.segments.length > 1;
       if (beside) continue;
@@ -246,6 +264,18 @@ function headingAbove(lines: readonly Line[], index: number, segment: Segment): 
     }
   }
   return { step: null, line: -1 };
+}
+
+/** "Tempering 482 °C (furnace 1)", and what is asked of it beside or below. */
+function beginsWithStep(other: Segment, { segments }: Line): boolean {
+  const [step, second] = stepsIn(other.text);
+  return (
+    segments[0] === other &&
+    step?.start === 0 &&
+    !second &&
+    other.words.length < 13 &&
+    /\d\s*(?:°|deg|F\b|C\b|hours?\b|hrs?\b|h\b|min\b)/i.test(other.text)
+  );
 }
 
 /** Words right of a label are its value: the name of a process says what the certificate is of, not where a part begins. */
@@ -278,16 +308,23 @@ const paragraphsOf = (lines: readonly Line[]): Passage[] =>
 
 function paragraphLines(lines: readonly Line[]): Line[][] {
   const paragraphs: Line[][] = [];
+  const right = Math.max(0, ...lines.map(({ box }) => box[2]));
+  const left = Math.min(right, ...lines.map(({ box }) => box[0]));
+  const full = left + 0.8 * (right - left);
   for (const line of lines) {
     const open = paragraphs[paragraphs.length - 1];
     const last = open?.[open.length - 1];
-    if (open && last && runsOn(last, line)) open.push(line);
+    if (open && last && runsOn(last, line, full)) open.push(line);
     else paragraphs.push([line]);
   }
   return paragraphs;
 }
 
-function runsOn(last: Line, line: Line): boolean {
+/** A line that ends so is not at its end. */
+const GOES_ON = /(?:[,;:–-]|\b(?:and|or|of|the|to|at|on|in|by|per|under|its|our|your|no\.?))$/i;
+
+/** @param full how far right a line of a text reaches at least, unless it is its last. */
+function runsOn(last: Line, line: Line, full: number): boolean {
   const words = last.segments.reduce((sum, { words }) => sum + words.length, 0);
   const close = line.box[1] - last.box[3] < 1.1 * Math.max(last.height, line.height);
   const level = Math.abs(line.box[0] - last.box[0]) < 3 * last.height;
@@ -297,10 +334,13 @@ function runsOn(last: Line, line: Line): boolean {
   const label = first ? labelAtStart(first.text) : null;
   const before = labelAtStart(last.segments[0]?.text ?? '');
   // Fields and items of a list, each with a label before it.
-  const goesOn = /(?:[,;:–-]|\b(?:and|or|of|the|to|at|on|in|by|per|under|its|our|your|no\.?))$/i.test(
-    last.segments[last.segments.length - 1]?.text ?? '',
-  );
-  if (!goesOn && label && before) return false;
+  const end = last.segments[last.segments.length - 1]?.text ?? '';
+  if (label && before && !GOES_ON.test(end)) {
+    // Fields and items of a list: each with the same label before it, or shorter than the lines of a text.
+    if (label.words === before.words && label.key === before.key) return false;
+    if (last.box[2] < full) return false;
+  }
+  if (label && /[.!]$/.test(end) && last.box[2] < full) return false;
   if (line.segments.length > 2) return false;
   const listed = /^\s*(?:[-–•*·]|\d{1,2}[.)])\s/.test(first?.text ?? '');
   return (

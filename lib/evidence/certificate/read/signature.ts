@@ -139,12 +139,27 @@ function looseStroke(paper: Paper): Spot | null {
   for (const sheet of paper.sheets) {
     const mark = sheet.marks.find(
       ({ kind, box }) =>
-        kind === 'stroke' && box[1] > 0.25 * sheet.height && widthOf(box) > 25 && heightOf(box) > 6,
+        box[1] > 0.25 * sheet.height &&
+        widthOf(box) > 25 &&
+        heightOf(box) > 6 &&
+        (kind === 'stroke' || (kind === 'picture' && isSmall(box, sheet) && isOverName(box, sheet))),
     );
     if (mark) return spotOfMark(sheet, mark);
   }
   return null;
 }
+
+/** A person's name stands right under it. */
+const isOverName = (box: Box, { lines }: Sheet): boolean =>
+  lines.some(({ segments }) =>
+    segments.some(
+      (segment) =>
+        NAME.test(segment.text) &&
+        segment.box[1] > box[1] &&
+        segment.box[1] - box[3] < 30 &&
+        sharedAcross(segment.box, box) > 0,
+    ),
+  );
 
 const spotOfMark = ({ page }: Sheet, { box }: Mark): Spot => ({ raw: '', page, box, legible: 1 });
 
