@@ -105,6 +105,8 @@ function inSentence(passage: Passage, pattern: RegExp): Candidate<string>[] {
     const value = (match[1] ?? '').replace(/[.,/-]+$/, '').trim();
     const start = match.index + match[0].lastIndexOf(match[1] ?? '');
     if (!/\d/.test(value) || beginsWithDay(passage.text.slice(start))) return [];
+    // A year alone is no number.
+    if (/^20\d\d$/.test(value)) return [];
     if (REPLACED.test(passage.text.slice(0, match.index))) return [];
     const found = readingAt(passage, start, start + value.length, value);
     return found ? [{ ...found, value: lettersOfOrder(found.value), trust: 0.7 }] : [];

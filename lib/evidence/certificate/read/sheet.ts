@@ -7,7 +7,9 @@ import { labelAtStart, labelsIn, type FoundLabel } from './find-labels';
 import type { LabelKey } from './labels';
 import { labelledTables } from './labelled-tables';
 import { labelsOnTop } from './labels-on-top';
-import { stepsIn, type Step } from './steps';
+import { paragraphLines, paragraphsOf } from './paragraphs';
+import { sectionBeside, sectionOf } from './sections';
+import type { Step } from './steps';
 
 /** A label and what may be its value, the likeliest first. */
 export interface Asked {
@@ -59,7 +61,7 @@ export function sheetOf(page: Page): Sheet {
       const first = lines[from]?.segments[0];
       return first ? sectionOf(lines, from, first) : null;
     }),
-    asked: askedOn(lines, tables, page.number),
+    asked: askedOn(lines, tables, page),
     paragraphs: paragraphsOf(lines),
   };
 }
@@ -71,7 +73,14 @@ interface Labelled {
   readonly isLabel: boolean;
 }
 
-function askedOn(lines: readonly Line[], tables: readonly Table<FoundLabel>[], page: number): Asked[] {
+/** How far down a page its foot begins. */
+const FOOT = 0.88;
+
+function askedOn(
+  lines: readonly Line[],
+  tables: readonly Table<FoundLabel>[],
+  { number: page, height }: Page,
+): Asked[] {
   const labelled = lines.map(({ segments }) =>
     segments.map((segment): Labelled => {
       const labels = labelsIn(segment.text);
@@ -97,7 +106,9 @@ function askedOn(lines: readonly Line[], tables: readonly Table<FoundLabel>[], p
         if (!spot) return;
         const values = valuesOf({ label, until, segment, place, index, lines, labelled });
         const section = sectionBeside(lines, index, segment, row.slice(0, place)) ?? null;
-        const before = segment.text.slice(0, label.start);
+        // At the foot of a page its whole line tells what a number is of.
+        const left = segment.box[1] > FOOT * height ? row.slice(0, place).map((one) => one.segment.text) : [];
+        const before = [...left, segment.text.slice(0, label.start)].join(' ');
         asked.push({
           label,
           spot,
@@ -214,142 +225,4 @@ function belowIt({ segment, index, lines, labelled }: Place): Segment | null {
     return found.isLabel ? null : found.segment;
   }
   return null;
-}
-
-/** What is asked of a step left of a label on its line is asked of the label's step too, when its heading is nearer. */
-function sectionBeside(
-  lines: readonly Line[],
-  index: number,
-  segment: Segment,
-  left: readonly Labelled[],
-): Step | null {
-  const own = headingAbove(lines, index, segment);
-  const beside = left
-    .filter(({ labels }) => labels.some(({ key }) => OF_A_STEP.has(key)))
-    .map((one) => headingAbove(lines, index, one.segment))
-    .reduce((near, one) => (one.line > near.line ? one : near), own);
-  return beside.step;
-}
-
-const OF_A_STEP: ReadonlySet<LabelKey> = new Set(['temperature', 'minutes', 'time_in', 'time_out', 'date']);
-
-/** The step that the nearest heading above speaks of. */
-const sectionOf = (lines: readonly Line[], index: number, segment: Segment): Step | null =>
-  headingAbove(lines, index, segment).step;
-
-interface HeadingAbove {
-  readonly step: Step | null;
-  /** Index of its line; -1 where there is none. */
-  readonly line: number;
-}
-
-function headingAbove(lines: readonly Line[], index: number, segment: Segment): HeadingAbove {
-  for (let above = index; above >= 0; above -= 1) {
-    const line = lines[above];
-    // A choice of processes is no heading.
-    if (!line || line.segments.filter(({ text }) => stepsIn(text).length > 0).length > 2) continue;
-    for (const other of line.segments) {
-      if (
-        other === segment ||
-        !(isHeading(other, line, above === index ? segment : null) || beginsWithStep(other, line))
-      )
-        continue;
-      if (answersLabel(other, line)) continue;
-      const beside = above !== index && sharedAcross(other.box, segment.box) <= 0 && line.segments.length > 1;
-      if (beside) continue;
-      const steps = stepsIn(other.text);
-      const [step] = steps;
-      if (step) return { step: steps.length === 1 ? step.step : null, line: above };
-      if (line.segments.length === 1) return { step: null, line: above };
-    }
-  }
-  return { step: null, line: -1 };
-}
-
-/** "Tempering 482 °C (furnace 1)", and what is asked of it beside or below. */
-function beginsWithStep(other: Segment, { segments }: Line): boolean {
-  const [step, second] = stepsIn(other.text);
-  return (
-    segments[0] === other &&
-    step?.start === 0 &&
-    !second &&
-    other.words.length < 13 &&
-    /\d\s*(?:°|deg|F\b|C\b|hours?\b|hrs?\b|h\b|min\b)/i.test(other.text)
-  );
-}
-
-/** Words right of a label are its value: the name of a process says what the certificate is of, not where a part begins. */
-function answersLabel(other: Segment, { segments }: Line): boolean {
-  const before = segments[segments.indexOf(other) - 1];
-  return before !== undefined && labelAtStart(before.text)?.whole === true;
-}
-
-/** A few words without figures that are no label of a value beside them. Left of the label on its own line also counts. */
-function isHeading(other: Segment, line: Line, onLineOf: Segment | null): boolean {
-  if (onLineOf && other.box[0] > onLineOf.box[0]) return false;
-  const text = other.text.trim().replace(/^(?:section |part )?(?:\d{1,2}|[A-Z])[.)\s]\s*/i, '');
-  if (/\d{2}/.test(text) || other.words.length > 7) return false;
-  const label = labelAtStart(text);
-  const steps = stepsIn(text);
-  if (steps.length > 0)
-    return (
-      label === null ||
-      label.key === 'process' ||
-      label.key === 'bake' ||
-      label.key === 'condition' ||
-      !label.marked
-    );
-  return label === null && line.segments.length === 1 && /^[\p{L}\s&/,.:()\-–]+$/u.test(text);
-}
-
-/** Lines that run on in the next one. A line runs on when it is a sentence's and reaches as far right as its neighbours. */
-const paragraphsOf = (lines: readonly Line[]): Passage[] =>
-  paragraphLines(lines).map((part) => joined(part.flatMap(({ segments }) => segments)));
-
-function paragraphLines(lines: readonly Line[]): Line[][] {
-  const paragraphs: Line[][] = [];
-  const right = Math.max(0, ...lines.map(({ box }) => box[2]));
-  const left = Math.min(right, ...lines.map(({ box }) => box[0]));
-  const full = left + 0.8 * (right - left);
-  for (const line of lines) {
-    const open = paragraphs[paragraphs.length - 1];
-    const last = open?.[open.length - 1];
-    if (open && last && runsOn(last, line, full)) open.push(line);
-    else paragraphs.push([line]);
-  }
-  return paragraphs;
-}
-
-/** A line that ends so is not at its end. */
-const GOES_ON = /(?:[,;:–-]|\b(?:and|or|of|the|to|at|on|in|by|per|under|its|our|your|no\.?))$/i;
-
-/** @param full how far right a line of a text reaches at least, unless it is its last. */
-function runsOn(last: Line, line: Line, full: number): boolean {
-  const words = last.segments.reduce((sum, { words }) => sum + words.length, 0);
-  const close = line.box[1] - last.box[3] < 1.1 * Math.max(last.height, line.height);
-  const level = Math.abs(line.box[0] - last.box[0]) < 3 * last.height;
-  const wide = last.box[2] - last.box[0] > 22 * last.height || words > 8;
-  const prose = last.segments.length <= 2 && words >= 5;
-  const [first] = line.segments;
-  const label = first ? labelAtStart(first.text) : null;
-  const before = labelAtStart(last.segments[0]?.text ?? '');
-  // Fields and items of a list, each with a label before it.
-  const end = last.segments[last.segments.length - 1]?.text ?? '';
-  if (label && before && !GOES_ON.test(end)) {
-    // Fields and items of a list: each with the same label before it, or shorter than the lines of a text.
-    if (label.words === before.words && label.key === before.key) return false;
-    if (last.box[2] < full) return false;
-  }
-  if (label && /[.!]$/.test(end) && last.box[2] < full) return false;
-  if (line.segments.length > 2) return false;
-  const listed = /^\s*(?:[-–•*·]|\d{1,2}[.)])\s/.test(first?.text ?? '');
-  return (
-    close &&
-    level &&
-    wide &&
-    prose &&
-    !listed &&
-    !(label?.marked ?? false) &&
-    !(label?.whole && line.segments.length > 1)
-  );
 }

@@ -44,6 +44,10 @@ export function readSignature(paper: Paper): ReadSignature {
     const scrawl = scrawlAt(paper, place);
     if (scrawl) return { present: true, spot: scrawl, belief: 0.8 };
   }
+  for (const place of nearby) {
+    const words = misreadWordsAt(paper, place);
+    if (words) return { present: true, spot: words, belief: 0.75 };
+  }
   const script = scriptedName(paper);
   if (script) return { present: true, spot: script, belief: 0.85 };
   const loose = places.length === 0 ? looseStroke(paper) : null;
@@ -127,6 +131,24 @@ function scriptedName(paper: Paper): Spot | null {
     });
     if (found) return spotIn(found, 0, found.text.length);
   }
+  return null;
+}
+
+/** What recognition makes of "/s/" before a name: "Is/", "S/T.". */
+const MISREAD_S = /^[/Il1|!([{]?\s?[sS5$]\s?[/Il1|!)\]}]\s?(?=\p{Lu})/u;
+
+function misreadWordsAt(paper: Paper, { label, page }: Answer): Spot | null {
+  const sheet = paper.sheets.find((one) => one.page === page);
+  if (!sheet || !label || sheet.origin !== 'recognised') return null;
+  const room = roomFor(label.box);
+  for (const { segments } of sheet.lines)
+    for (const segment of segments)
+      if (
+        MISREAD_S.test(segment.text) &&
+        sharedAcross(segment.box, room) > 0 &&
+        sharedDown(segment.box, room) > 0.4 * heightOf(segment.box)
+      )
+        return spotIn(segment, 0, segment.text.length);
   return null;
 }
 
