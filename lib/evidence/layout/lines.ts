@@ -1,6 +1,7 @@
 import type { Box, Mark, Page, Word } from '../page';
 import { boxAround, heightOf, middleOf, sharedDown, widthOf } from './box';
 import { passageOf, type Passage } from './passage';
+import { besideOneAnother } from './side-column';
 import { tickedOnly } from './ticked';
 
 /** Words that stand together on a line, apart from what stands further along it: a cell, a label, a value. */
@@ -24,7 +25,9 @@ export interface Line {
  */
 export function linesOf(page: Page): Line[] {
   const upright = page.words.filter(({ text }) => text.trim() !== '');
-  const rows = tickedOnly(rowsOf(upright)).filter(({ length }) => length > 0);
+  const rows = besideOneAnother(upright, page.width).flatMap((part) =>
+    tickedOnly(rowsOf(part)).filter((row) => !row.every(({ text }) => DRAWN.test(text))),
+  );
   const fences = page.marks.filter(({ kind, box }) => kind === 'rule' && heightOf(box) > widthOf(box));
   return rows.map((words, index) => {
     const height = usualHeight(words);
@@ -36,6 +39,11 @@ export function linesOf(page: Page): Line[] {
     return { page: page.number, box, height, segments };
   });
 }
+
+/** Lines and borders made of signs. */
+const DRAWN = /^(?:[+|¦=\-–—*#~_]{2,}|[|¦+])$/;
+/** The border between two cells, where a table is made of signs. */
+const BORDER = /^[|¦│║]$/;
 
 /** Middle of the heights that have letters in them: a dash or a dot is as high as nothing. */
 function usualHeight(words: readonly Word[]): number {
@@ -90,11 +98,18 @@ function sameLine(last: Word, word: Word): number {
 
 function cutApart(words: readonly Word[], height: number, fences: readonly Mark[]): Word[][] {
   const parts: Word[][] = [];
+  let bordered = words.filter(({ text }) => BORDER.test(text)).length > 1;
+  const isTable = bordered;
   for (const word of words) {
+    if (isTable && BORDER.test(word.text)) {
+      bordered = true;
+      continue;
+    }
     const part = parts[parts.length - 1];
     const last = part?.[part.length - 1];
-    if (part && last && !standsApart(last, word, height, fences)) part.push(word);
+    if (part && last && !bordered && !standsApart(last, word, height, fences)) part.push(word);
     else parts.push([word]);
+    bordered = false;
   }
   return parts;
 }

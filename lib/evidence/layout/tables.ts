@@ -1,7 +1,8 @@
 import type { Box } from '../page';
-import { boxAround, centreOf, heightOf, sharedAcross, widthOf } from './box';
+import { boxAround, centreOf, heightOf, sharedAcross } from './box';
+import { cellsOf } from './cells';
 import type { Line, Segment } from './lines';
-import { joined, passageOf, type Passage, type PlacedWord } from './passage';
+import { joined, type Passage } from './passage';
 
 /** Cells of the rows under a heading, by the place of their column in it. */
 export interface Table<Heading> {
@@ -242,47 +243,3 @@ function endsAt<Heading>(
 /** A row that adds up the others is the last, and none of them. */
 const SUM =
   /^(?:grand |sub-?)?(?:totals?|summe|gesamt|sum|avg\.?|average|mean|mittelwert|moyenne|media)\s*:?(?:\s*\d*(?:[.,]\d+)?)$/i;
-
-/** The words of a line, each in the column it stands under. */
-function cellsOf(line: Line, columns: readonly Column<unknown>[]): Passage[][] {
-  const cells = columns.map((): Passage[] => []);
-  for (const segment of line.segments) {
-    const under = columns.filter(({ box }) => sharedAcross(box, segment.box) > 0.35 * widthOf(box));
-    if (under.length <= 1) cells[columnOf(segment.box, columns)]?.push(segment);
-    else for (const part of wordsByColumn(segment, columns)) cells[part.column]?.push(passageOf(part.words));
-  }
-  return cells;
-}
-
-function wordsByColumn(
-  segment: Segment,
-  columns: readonly Column<unknown>[],
-): { column: number; words: PlacedWord[] }[] {
-  const parts: { column: number; words: PlacedWord[] }[] = [];
-  for (const word of segment.words) {
-    const column = columnOf(word.box, columns);
-    const last = parts[parts.length - 1];
-    if (last?.column === column) last.words.push(word);
-    else parts.push({ column, words: [word] });
-  }
-  return parts;
-}
-
-/** The column under whose heading a box stands, or whose heading it is nearest to at either edge or in the middle. */
-function columnOf(box: Box, columns: readonly Column<unknown>[]): number {
-  let best = { index: 0, far: Infinity };
-  columns.forEach((column, index) => {
-    const shared = sharedAcross(column.box, box);
-    const far =
-      shared > 0
-        ? -shared / Math.min(widthOf(column.box), widthOf(box))
-        : Math.min(
-            Math.abs(column.box[0] - box[0]),
-            Math.abs(column.box[2] - box[2]),
-            Math.abs(centreOf(column.box) - centreOf(box)),
-          ) +
-          heightOf(box) * 0.01;
-    if (far < best.far) best = { index, far };
-  });
-  return best.index;
-}

@@ -1,5 +1,5 @@
 import type { AsFiled, Mark, Page, Word } from '../page';
-import { shareWithin } from './box';
+import { joinNear, shareWithin } from './box';
 import type { Component } from './picture/find-components';
 import { findStrokes } from './picture/find-strokes';
 import type { PixelBox } from './picture/grey';
@@ -55,7 +55,11 @@ function assemble(page: Prepared, recognised: readonly RecognisedWord[]): Page {
   const toPoints = (box: PixelBox): PixelBox => box.map((edge) => edge * points) as unknown as PixelBox;
   const sure = recognised.filter(({ confidence }) => confidence >= DOUBTFUL).map(({ box }) => box);
   const componentsAt = byRows(page.components);
-  const strokes = [...findStrokes(page.components, [...sure, ...page.stamps], dpi), ...page.hands];
+  const strokes = [
+    ...findStrokes(page.components, [...sure, ...page.stamps], dpi),
+    ...page.hands,
+    ...scrawled(recognised, dpi),
+  ];
   const words = recognised
     .filter((word, index) => isWord(word) || isNumeral(word, recognised[index - 1]))
     .map((word) => ({ ...word, text: lookAgain(word.text, word.box, componentsAt(word.box), page.ink) }))
@@ -96,6 +100,24 @@ function byRows(components: readonly Component[]): (box: PixelBox) => Component[
       found.push(...(rows.get(row) ?? []));
     return found;
   };
+}
+
+/** In inches: a hand's strokes that a rule cut to pieces, read as signs that are no words. */
+const SCRAWL = { apart: 0.35, wide: 0.4, high: 0.09 } as const;
+
+function scrawled(recognised: readonly RecognisedWord[], dpi: number): PixelBox[] {
+  const signs = recognised.filter(
+    ({ text, confidence, box }) =>
+      confidence < 0.5 &&
+      /[/\\()<>{}]/.test(text) &&
+      !/[\p{L}\p{N}]{2}/u.test(text) &&
+      box[3] - box[1] > 0.06 * dpi,
+  );
+  if (signs.length < 2) return [];
+  return joinNear(
+    signs.map(({ box }) => box),
+    SCRAWL.apart * dpi,
+  ).filter((box) => box[2] - box[0] > SCRAWL.wide * dpi && box[3] - box[1] > SCRAWL.high * dpi);
 }
 
 /** Remains of rules and dust are read as bars and points of their own. */

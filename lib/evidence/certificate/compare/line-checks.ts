@@ -1,6 +1,6 @@
 import type { OrderLine } from '../../order';
 import type { CertificateLine } from '../certificate';
-import { likeness, lookalikeKey, plainKey } from '../match/alike';
+import { likeness, lookalikeKey, mayBeMisread, plainKey } from '../match/alike';
 import { namesOrder } from '../match/same-order-number';
 import type { Check, Compared } from './compared';
 import { cannotTell, doubtful, meets, notStated, observed, wrong, type Outcome } from './outcome';
@@ -89,6 +89,11 @@ function namedPart(ordered: OrderLine, { line, by }: StatedLine, isRecognised: b
     ordered: ordered.part_number,
     stated: line.part_number,
   };
+  if (by === 'near' && isRecognised && mayBeMisread(line.part_number ?? '', ordered.part_number))
+    return cannotTell(
+      asked,
+      `${line.part_number} was recognised where the order has ${ordered.part_number}: look at the page.`,
+    );
   switch (by) {
     case 'same':
       return meets(asked, 'It is the number ordered.');

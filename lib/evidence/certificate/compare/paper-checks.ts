@@ -6,7 +6,7 @@ import type { SeenCertificate, StatedCertificate } from '../certificate';
 import { plainKey } from '../match/alike';
 import { areSameCompany } from '../match/same-company';
 import { namesOrder } from '../match/same-order-number';
-import { meets, notStated, observed, wrong, type Outcome } from './outcome';
+import { cannotTell, meets, notStated, observed, wrong, type Outcome } from './outcome';
 
 /** A certificate by itself: what is asked of every one, whatever was ordered. */
 export interface Alone {
@@ -39,6 +39,26 @@ function daysOfWork({ cycles, plating_end, bake_start, bake_end }: StatedCertifi
     .toSorted();
 }
 
+/** How sure the order of day and month must be for a date to be held against a certificate. */
+const SURE_OF_ORDER = 0.9;
+
+/**
+ * The day with day and month exchanged, where the date is written in figures, nothing in the document shows their order, and
+ * only that other day is possible.
+ */
+function otherDay(
+  { certificate_date: date, facts }: StatedCertificate,
+  { from, to }: { readonly from: string | null; readonly to: string },
+): string | null {
+  const fact = facts.find(({ field }) => field === 'certificate_date');
+  const isPossible = (day: string): boolean => day <= to && (from === null || day >= from);
+  if (date === null || !fact || fact.confidence >= SURE_OF_ORDER || isPossible(date)) return null;
+  if (!/^\W*\d{1,2}\W+\d{1,2}\W+(?:\d{2}|\d{4})\W*$/.test(fact.raw)) return null;
+  const [year = '', month = '', day = ''] = date.split('-');
+  const other = `${year}-${day}-${month}`;
+  return Number(day) <= 12 && isPossible(other) ? other : null;
+}
+
 /** It was written after the parts left and the work was done, and not after today. One wrong date is told once. */
 export function isDatedRight({ stated, order, today }: Alone): Outcome[] {
   const { certificate_date: date } = stated;
@@ -50,6 +70,14 @@ export function isDatedRight({ stated, order, today }: Alone): Outcome[] {
   };
   const [first] = daysOfWork(stated);
   const last = daysOfWork(stated).at(-1);
+  const other = otherDay(stated, { from: dispatched, to: today });
+  if (other !== null)
+    return [
+      cannotTell(
+        asked,
+        `The date may be ${other} as well, which is possible: nothing shows whether day or month comes first.`,
+      ),
+    ];
   if (date !== null && date > today)
     return [wrong('dated_in_future', asked, `The certificate is dated ${date}; today is ${today}.`)];
   if (date !== null && dispatched !== null && date < dispatched)

@@ -31,6 +31,18 @@ export function likeness(one: string, other: string): Likeness | null {
   return areNear(a, b) ? 'near' : null;
 }
 
+/**
+ * Whether recognition alone may make one of two near numbers of the other: a sign that it saw twice or not at all, or a
+ * letter for a figure. It does not take one figure for another.
+ */
+export function mayBeMisread(one: string, other: string): boolean {
+  const [a, b] = [plainKey(one), plainKey(other)];
+  if (!areNear(a, b)) return false;
+  if (a.length !== b.length) return true;
+  const at = [...a].findIndex((sign, place) => sign !== b.charAt(place));
+  return at < 0 || /\D/.test(a.charAt(at) + b.charAt(at));
+}
+
 function areTransposed(a: string, b: string): boolean {
   if (a.length !== b.length) return false;
   const places = [...a].flatMap((letter, at) => (letter === b.charAt(at) ? [] : [at]));

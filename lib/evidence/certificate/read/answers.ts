@@ -101,7 +101,8 @@ function rowLabelled({ table, row, name, order, section }: RowPlace): Answer[] |
   const results = headings.flatMap((heading, index) => (heading && FOUND.has(heading.key) ? [index] : []));
   const steps = headings.flatMap((heading, index) => (index > 0 && heading?.step ? [index] : []));
   const places = headings.flatMap((heading, index) => (heading?.key === 'specimen' ? [index] : []));
-  const apart = steps.length > 1 ? steps : places;
+  const byStep = steps.length > 1 || (steps.length > 0 && headings[0]?.key === 'test');
+  const apart = byStep ? steps : places;
   const asks = results.length > 0 ? results : apart;
   const first = row.cells.findIndex(
     (cell, index) => cell !== null && !/^\d{1,2}\.?$/.test(cell.text) && !asks.includes(index),

@@ -73,6 +73,8 @@ function conditionChange(answer: Answer): Candidate<string>[] {
   return [];
 }
 
+const BEGINS_WITH_NUMERAL = new RegExp(String.raw`^${ROMAN}[\s,]+${KIND}\.?\s*${ROMAN}`, 'iu');
+
 /** What is asked for as type, class and the like. */
 function joinedUp(answers: readonly Answer[]): Candidate<string>[] {
   const read = answers.flatMap((answer) => {
@@ -86,7 +88,9 @@ function joinedUp(answers: readonly Answer[]): Candidate<string>[] {
   const parts: { name: string; text: string; spot: Spot; trust: number }[] = [];
   for (const { answer, words, trust } of read) {
     const name = answer.words.replace(/\s*no\.?$/, '').trim();
-    const said = designation(words.value);
+    // "Class Type II Class 1": the label's last word belongs to the value.
+    const last = name.split(/[\s/]+/).at(-1) ?? '';
+    const said = designation(BEGINS_WITH_NUMERAL.test(words.value) ? `${last} ${words.value}` : words.value);
     const single =
       /^(?:type|class|grade|typ|klasse|classe|tipo|clase)$/.test(name) &&
       new RegExp(`^${ROMAN}$`, 'iu').test(words.value);

@@ -48,7 +48,13 @@ export function codeIn(passage: Passage, isDate: (text: string) => boolean): Rea
       const end = cut ? next.index + next[0].length : match.index + token.length;
       return readingAt(passage, match.index, end, cut ? `${match[0]}${trimmedCode(next[0])}` : token);
     }
-    if (next && /^[A-Z]{1,6}-?$/.test(match[0]) && /^\d/.test(next[0]) && isNear(match, next)) {
+    if (
+      next &&
+      !SMALL_WORD.test(match[0]) &&
+      /^[A-Z]{1,6}-?$/.test(match[0]) &&
+      /^\d/.test(next[0]) &&
+      isNear(match, next)
+    ) {
       const end = next.index + trimmedCode(next[0]).length;
       const start = match.index;
       return readingAt(
@@ -63,6 +69,8 @@ export function codeIn(passage: Passage, isDate: (text: string) => boolean): Rea
   }
   return null;
 }
+
+const SMALL_WORD = /^(?:at|to|in|on|by|of|for|per|and|the|from|with)$/i;
 
 const isNear = (match: RegExpExecArray, next: RegExpExecArray): boolean =>
   next.index - (match.index + match[0].length) <= 2;

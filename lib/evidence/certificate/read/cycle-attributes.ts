@@ -27,7 +27,7 @@ export const isLimit = (
 const OTHER_DURATION =
   /(?:within|delay|transfer|quench(?:ed)?(?:\s+\w+){0,4}|after|before|less than|<|≤)\s*:?\s*(?:\w+\s+){0,1}$/i;
 const OTHER_AFTER =
-  /^\s*(?:after|of (?:plating|the plating)|quench|delay|transfer|from furnace|later|interval)/i;
+  /^\s*(?:after|of (?:plating|the plating)|quench\s*(?:delay|transfer|lag)|delay|transfer|from furnace|later|interval)/i;
 
 /**
  * Temperature, time at it, start and end in one text.

@@ -78,13 +78,17 @@ export function readCycles(paper: Paper, process: Process | null): ReadCycle[] {
 }
 
 function asked(paper: Paper, process: Process | null): Observation[] {
+  let begun: { step: Step; order: number } | null = null;
   return paper.answers.flatMap((answer): Observation[] => {
     if (!CYCLE_KEYS.has(answer.key) || answer.also.includes('requirement')) return [];
     // A finish is a coating, or the end of a soak when a time stands there.
     const finished =
       answer.key === 'process' && answer.words === 'finish' && timesIn(textOf(answer)).length > 0;
     const key = finished ? 'time_out' : answer.key;
-    const step = stepOf({ ...answer, key }, process);
+    // "Baked from …" on one line, "to …" on the next.
+    const goesOn = key === 'time_out' && begun !== null && answer.order - begun.order < 2100;
+    const step = stepOf({ ...answer, key }, process) ?? (goesOn ? (begun?.step ?? null) : null);
+    if (step && (key === 'bake_start' || key === 'time_in')) begun = { step, order: answer.order };
     if (!step) return [];
     for (const { passage, how } of answer.values) {
       const attributes = cycleAttributesIn(

@@ -53,7 +53,9 @@ export function dayOrderOf(text: string, sheets: readonly Sheet[], decimal: Deci
   const close = closerTogether(text);
   if (close) return { order: close, isShown: true };
   const hits = (signs: readonly RegExp[]): number => signs.filter((sign) => sign.test(text)).length;
-  const a4 = sheets.filter(({ width, height }) => Math.abs(Math.max(width, height) - 842) < 4).length;
+  const a4 = sheets.filter(({ width, height }) =>
+    [842, 595, 1191].some((side) => Math.abs(Math.max(width, height) - side) < 4),
+  ).length;
   const letter = sheets.filter(({ width, height }) => Math.abs(Math.max(width, height) - 792) < 4).length;
   const european =
     hits(EUROPEAN) + (decimal === ',' ? 2 : 0) + (a4 > 0 ? 1 : 0) + Math.min(1, count('day_first', true));

@@ -1,5 +1,6 @@
 import { folded } from './fold';
-import { LABELS, type LabelKey } from './labels';
+import { PHRASES, type Phrase } from './label-phrases';
+import type { LabelKey } from './labels';
 import { stepsIn, type Step } from './steps';
 
 export interface FoundLabel {
@@ -19,79 +20,6 @@ export interface FoundLabel {
   readonly qualifier: string;
   /** Nothing follows in the text it was found in. */
   readonly whole: boolean;
-}
-
-interface Phrase {
-  readonly key: LabelKey;
-  readonly pattern: RegExp;
-  readonly needsColon: boolean;
-  readonly numbered: boolean;
-}
-
-const WORDS: Readonly<Record<string, string>> = {
-  QTY: String.raw`(?:qty|q['’ ]?ty|quantity|quant|pcs|pc s|pieces|parts|units|no of (?:pcs|pieces|parts)|total|q[. ]?ta|quantita)`,
-  ACC: "acc(?:ept(?:ed|able)?|ettat[aei]|[ '’]?d)?|good|ok(?:ay)?|pass(?:ed)?|conform(?:ing|ed)",
-  REJ: "rej(?:ect(?:ed|s)?|[ '’]?d)?|scartat[aei]|scrap(?:ped)?|fail(?:ed)?|non[ -]?conform(?:ing)?|nok|discrepant|defective|bad",
-  REC: "rec(?:eived|[ '’]?d)|rcvd|rcd|submitted|presented|ordered|in",
-  OUT: 'ship(?:ped)?|shpd|out|d[ei]spatched|d[ei]sp|delivered|returned|processed|treated|certified|released',
-  COND: 'condition|cond|temper',
-  no: String.raw`(?:n\.?[°ºo]s?|n(?=\.\s?:?\s*[^\s.])|nr|num|numbers?|nbr|numero|nummer|#)`,
-  cert: String.raw`cert(?:ificate|ification|ificat|if)?`,
-  spec: String.raw`spec(?:ification|s)?`,
-  temp: String.raw`temp`,
-  '%': '%',
-  '&': '&',
-};
-
-/** With what the words of a group may begin. */
-const FIRST: Readonly<Record<string, readonly string[]>> = {
-  no: ['n', '#'],
-  QTY: ['q', 'p', 'u', 'n', 't'],
-  ACC: ['a', 'g', 'o', 'p', 'c'],
-  REJ: ['r', 's', 'f', 'n', 'd', 'b'],
-  REC: ['r', 's', 'p', 'o', 'i'],
-  OUT: ['s', 'o', 'd', 'r', 'p', 't', 'c'],
-  COND: ['c', 't'],
-};
-
-const BETWEEN = String.raw`[\s./_\-]{0,3}`;
-
-function patternOf(words: readonly string[]): RegExp {
-  const parts = words.map((word, index) => {
-    const may = word.endsWith('?');
-    const plain = may ? word.slice(0, -1) : word;
-    // As folded texts have it: no l.
-    const group = /^[A-Z]+$/.test(plain) ? `(?:${(WORDS[plain] ?? '').replace(/l/g, 'i')})` : WORDS[plain];
-    const said = group ?? folded(plain);
-    const before = index === 0 ? '' : BETWEEN;
-    return may ? `(?:${before}${said})?` : `${before}${said}`;
-  });
-  return new RegExp(`${parts.join('').replace(/\\{2}/g, '\\')}(?:(?<=#)|(?![a-z0-9]))`, 'y');
-}
-
-/** By first letter, the longest first: "part no" is not "part". */
-const PHRASES: ReadonlyMap<string, readonly Phrase[]> = indexed();
-
-function indexed(): Map<string, Phrase[]> {
-  const all = (Object.keys(LABELS) as LabelKey[]).flatMap((key) =>
-    LABELS[key].split(/,\s*/).map((phrase) => ({ key, phrase: phrase.trim() })),
-  );
-  all.sort((a, b) => b.phrase.length - a.phrase.length);
-  const byLetter = new Map<string, Phrase[]>();
-  for (const { key, phrase } of all) {
-    const needsColon = phrase.endsWith(':');
-    const words = phrase.replace(/\s*:$/, '').split(' ');
-    const entry = {
-      key,
-      needsColon,
-      pattern: patternOf(words),
-      numbered: words.some((word) => word === 'no' || word === 'no?'),
-    };
-    const letter = folded(words[0] ?? '').charAt(0);
-    const first = FIRST[words[0]?.replace('?', '') ?? ''] ?? [letter];
-    for (const sign of first) byLetter.set(sign, [...(byLetter.get(sign) ?? []), entry]);
-  }
-  return byLetter;
 }
 
 /** Numbers of boxes and bullets before a label: "1. Customer", "(3) Part No.", "• Date". */
@@ -147,6 +75,8 @@ function labelAt(text: string, plain: string, at: number, first: boolean): Found
   const stepped = steppedAt(text, plain, at);
   const best = stepped && stepped.end > (bare?.end ?? 0) ? stepped : bare && { ...bare, step: null };
   if (!best) return null;
+  // "OK 74103" is a place in Oklahoma.
+  if (/^ok$/i.test(text.slice(at, best.end)) && /^\s+\d{5}(?!\d)/.test(text.slice(best.end))) return null;
   // "L55" is folded into "iss".
   if ((text.slice(at, best.end).match(/\d/g)?.length ?? 0) * 2 > best.end - at) return null;
   // "PO-5001" is a number and no question for one.
@@ -208,14 +138,18 @@ function steppedAt(
 ): { phrase: Phrase; end: number; step: Step } | null {
   const [step] = stepsIn(text.slice(at));
   if (!step || step.start !== 0) return null;
-  const gap = /^\s*(?:cycle|treatment|heat treat(?:ment)?|furnace|bake)?[\s\-–—,/:]{0,4}/i.exec(
-    text.slice(at + step.end),
-  );
+  const gap =
+    /^\s*(?:\([^)]{1,30}\)\s*)?(?:cycle|treatment|heat treat(?:ment)?|furnace|bake)?[\s\-–—,/:]{0,4}/i.exec(
+      text.slice(at + step.end),
+    );
   for (const skip of [
     gap?.[0].length ?? 0,
     /^[\s\-–—,/:]*/.exec(text.slice(at + step.end))?.[0].length ?? 0,
   ]) {
-    const found = phraseAt(plain, at + step.end + skip);
+    const any = phraseAt(plain, at + step.end + skip);
+    // A finish is a coating, but of a step it is the end.
+    const ends = any?.phrase.key === 'process' && plain.startsWith('finish', at + step.end + skip);
+    const found = any && ends ? { ...any, phrase: { ...any.phrase, key: 'time_out' as const } } : any;
     if (found && ATTRIBUTES.has(found.phrase.key)) return { ...found, step: step.step };
   }
   return null;

@@ -91,6 +91,10 @@ function fromAnswer(answer: Answer, field: CodeField): Candidate<string>[] {
   ];
 }
 
+/** What the paper takes the place of is not what it is. */
+const REPLACED =
+  /\b(?:replac\w*|supersed\w*|voids?|cancel\w*|previous|ersetzt|remplace|sustituye)\b[^.;]{0,30}$/i;
+
 /** No order begins with P0. */
 const lettersOfOrder = (code: string): string => code.replace(/^P(?:0O|O0|0)(?=-?\d)/, 'PO');
 
@@ -101,6 +105,9 @@ function inSentence(passage: Passage, pattern: RegExp): Candidate<string>[] {
     const value = (match[1] ?? '').replace(/[.,/-]+$/, '').trim();
     const start = match.index + match[0].lastIndexOf(match[1] ?? '');
     if (!/\d/.test(value) || beginsWithDay(passage.text.slice(start))) return [];
+    // A year alone is no number.
+    if (/^20\d\d$/.test(value)) return [];
+    if (REPLACED.test(passage.text.slice(0, match.index))) return [];
     const found = readingAt(passage, start, start + value.length, value);
     return found ? [{ ...found, value: lettersOfOrder(found.value), trust: 0.7 }] : [];
   });

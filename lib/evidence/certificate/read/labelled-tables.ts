@@ -58,6 +58,9 @@ function headingOf(text: string): FoundLabel | null {
   const [step] = stepsIn(text);
   const names = step?.start === 0 && step.end >= text.trimEnd().length ? step.step : null;
   if (label?.whole) return names && !label.step ? { ...label, step: names } : label;
+  // "CERTIFICATE" over a number asks for it as "Certificate:" does.
+  const asked = labelAtStart(`${text}:`);
+  if (asked?.key === 'certificate_number' && asked.whole) return { ...asked, marked: false };
   if (PLACE_OF_TEST.test(text)) return plainHeading('specimen', text);
   // "Cast/lot": one of the two is known.
   const half = text.includes('/') ? text.split('/').map((part) => labelAtStart(part.trim())) : [];

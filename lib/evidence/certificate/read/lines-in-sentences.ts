@@ -117,9 +117,11 @@ function countSaid(passage: Passage, patterns: readonly RegExp[], paper: Paper):
   return null;
 }
 
+/** The first that has a figure in it. */
 function said(passage: Passage, pattern: RegExp): Reading<string> | null {
-  const match = pattern.exec(passage.text);
-  return match
-    ? readingAt(passage, match.index, match.index + match[0].length, (match[1] ?? '').replace(/[.,]$/, ''))
-    : null;
+  for (const match of passage.text.matchAll(new RegExp(pattern.source, 'giu'))) {
+    const value = (match[1] ?? '').replace(/[.,]$/, '');
+    if (/\d/.test(value)) return readingAt(passage, match.index, match.index + match[0].length, value);
+  }
+  return null;
 }

@@ -54,6 +54,7 @@ const WRITERS: Partial<Record<LabelKey, Writer>> = {
   quantity_received: counted('received'),
   material: (line, value) => {
     const read = cell(wordsIn(value.passage), value);
+    if (read && NO_MATERIAL.test(read.value)) return false;
     if (read && read.value.length <= 80) line.material ??= { ...read, value: annealed(read.value) };
     return read !== null;
   },
@@ -72,6 +73,9 @@ const WRITERS: Partial<Record<LabelKey, Writer>> = {
     return serials.length > 0;
   },
 };
+
+/** A title that begins with the same word: "Material process certification". */
+const NO_MATERIAL = /^(?:process\w*|test\w*|certif\w*|report|record|inspection|conform\w*|review)\b/i;
 
 function counted(field: 'quantity' | 'accepted' | 'rejected' | 'received'): Writer {
   return (line, value, paper) => {
@@ -190,9 +194,10 @@ function write(line: ReadLine, answer: Answer, paper: Paper, beside: readonly An
 /** "12 / 0" under "Accepted / Rejected"; null where there are not as many parts as questions. */
 function splitAtStrokes(value: AnswerValue, count: number): AnswerValue[] | null {
   const { passage } = value;
-  const cuts = [...passage.text.matchAll(/\s*[/|;]\s*|\s+(?=\d+\s*$)/g)].filter(
-    (_, index) => index < count - 1,
-  );
+  const words = passage.text.trim().split(/\s+/);
+  const apart =
+    words.length === count && !/[/|;]/.test(passage.text) ? /\s+/g : /\s*[/|;]\s*|\s+(?=\d+\s*$)/g;
+  const cuts = [...passage.text.matchAll(apart)].filter((_, index) => index < count - 1);
   if (cuts.length !== count - 1) return null;
   const edges = [0, ...cuts.flatMap((cut) => [cut.index, cut.index + cut[0].length]), passage.text.length];
   return Array.from({ length: count }, (_, index) => ({

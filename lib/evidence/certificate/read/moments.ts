@@ -11,7 +11,7 @@ export interface FoundMoment {
 
 const D = String.raw`[\dOoIl|]`;
 const CLOCK = new RegExp(
-  String.raw`(?<![\d:.,])(?:(${D}{1,2})\s?[:h]\s?(${D}{2})(?::${D}{2})?\s*([ap])?(?:\.?m\.?)?(?:\s*(?:hrs?\b|h\b|uhr\b))?|(${D}{1,2})\s*([ap])\.?m\.?\b|([012]${D})([0-5]${D})\s*(?:hrs?\b|h\b|uhr\b))(?![\d:])`,
+  String.raw`(?<![\d:.,])(?:(${D}{1,2})\s?[:h]\s?(${D}{2})(?::${D}{2})?\s*([ap])?(?:\.?m\.?)?(?:\s*(?:hrs?\b|h\b|uhr\b))?|(${D}{1,2})\s*([ap])\.?m\.?\b|([012]${D})([0-5]${D})\s*(?:hrs?\b|h\b|uhr\b)|kl\.?\s*(\d{1,2})[.:](\d{2}))(?![\d:])`,
   'giu',
 );
 
@@ -34,8 +34,8 @@ interface FoundTime {
  */
 export function timesIn(text: string): FoundTime[] {
   return [...text.matchAll(CLOCK)].flatMap((match) => {
-    const [whole, h1, m1, half1, h2, half2, h3, m3]: (string | undefined)[] = match;
-    const time = clock(h1 ?? h2 ?? h3 ?? '', m1 ?? m3 ?? '00', half1 ?? half2);
+    const [whole, h1, m1, half1, h2, half2, h3, m3, h4, m4]: (string | undefined)[] = match;
+    const time = clock(h1 ?? h2 ?? h3 ?? h4 ?? '', m1 ?? m3 ?? m4 ?? '00', half1 ?? half2);
     return time === null
       ? []
       : [{ start: match.index, end: match.index + (whole ?? '').trimEnd().length, time }];
@@ -67,7 +67,9 @@ export function momentsIn(text: string, asked = false): FoundMoment[] {
     ({ start, end }) => !days.some((day) => start < day.end && end > day.start),
   );
   if (asked && times.length === 0) times = bareTime(text, days);
-  else times = [...times, ...timesBehindDays(text, days)];
+  times = [...times, ...timesBehindDays(text, days)].filter(
+    (one, index, all) => all.findIndex(({ end }) => end === one.end) === index,
+  );
   const taken = new Set<FoundTime>();
   const whole = days.map((day): FoundMoment => {
     const time = times.find(

@@ -8,6 +8,7 @@ import { daysIn } from './dates';
 import { labelAtStart } from './find-labels';
 import type { Paper } from './paper';
 import type { Sheet } from './sheet';
+import { stepsIn } from './steps';
 
 /** How a firm is written. */
 export const LEGAL =
@@ -127,6 +128,7 @@ function nameIn(passage: Passage): Candidate<string> | null {
   const words = value.split(/\s+/);
   if (words.length > 8 || (value.match(/\p{L}/gu)?.length ?? 0) < 4 || /\d{3}/.test(value)) return null;
   if (ADDRESS.test(value) && !LEGAL.test(value) && !TRADE.test(value)) return null;
+  if (stepsIn(value)[0]?.start === 0 && !LEGAL.test(value)) return null;
   if (daysIn(value).length > 0 || /[@]|www\./i.test(value)) return null;
   const at = passage.text.indexOf(value);
   const spot = spotIn(passage, Math.max(0, at), Math.max(0, at) + value.length);

@@ -28,7 +28,11 @@ export function numberFrom(written: string, sign: DecimalSign): number {
  */
 export function decimalSignOf(text: string): DecimalSign {
   const commas = text.match(/(?<![\d,.])\d{1,4},\d{1,2}(?![\d,])/g)?.length ?? 0;
-  const points = text.match(/(?<![\d,./])\d{1,4}\.\d{1,2}(?![\d,.])/g)?.length ?? 0;
+  // A time may be written with a full stop.
+  const points =
+    text
+      .replace(/(?:kl\.?|uhr|\d{4}-\d\d-\d\d|\d\d\.\d\d\.\d{4})\s+\d{1,2}\.\d{2}(?!\d)/gi, ' ')
+      .match(/(?<![\d,./])\d{1,4}\.\d{1,2}(?![\d,.])/g)?.length ?? 0;
   // Who parts the day by full stops has a comma before decimals.
   const dotted = /(?<!\d)\d{1,2}\.\d{1,2}\.(?:20)?\d{2}(?!\d)/.test(text);
   return commas > points || (dotted && commas > 0) ? ',' : '.';

@@ -6,7 +6,10 @@ import type { Mark, Page } from '../../page';
 import { labelAtStart, labelsIn, type FoundLabel } from './find-labels';
 import type { LabelKey } from './labels';
 import { labelledTables } from './labelled-tables';
-import { stepsIn, type Step } from './steps';
+import { labelsOnTop } from './labels-on-top';
+import { paragraphLines, paragraphsOf } from './paragraphs';
+import { sectionBeside, sectionOf } from './sections';
+import type { Step } from './steps';
 
 /** A label and what may be its value, the likeliest first. */
 export interface Asked {
@@ -44,7 +47,7 @@ export interface Sheet {
 }
 
 export function sheetOf(page: Page): Sheet {
-  const lines = linesOf(page);
+  const lines = labelsOnTop(linesOf(page));
   const tables = labelledTables(lines);
   return {
     page: page.number,
@@ -58,7 +61,7 @@ export function sheetOf(page: Page): Sheet {
       const first = lines[from]?.segments[0];
       return first ? sectionOf(lines, from, first) : null;
     }),
-    asked: askedOn(lines, tables, page.number),
+    asked: askedOn(lines, tables, page),
     paragraphs: paragraphsOf(lines),
   };
 }
@@ -70,7 +73,14 @@ interface Labelled {
   readonly isLabel: boolean;
 }
 
-function askedOn(lines: readonly Line[], tables: readonly Table<FoundLabel>[], page: number): Asked[] {
+/** How far down a page its foot begins. */
+const FOOT = 0.88;
+
+function askedOn(
+  lines: readonly Line[],
+  tables: readonly Table<FoundLabel>[],
+  { number: page, height }: Page,
+): Asked[] {
   const labelled = lines.map(({ segments }) =>
     segments.map((segment): Labelled => {
       const labels = labelsIn(segment.text);
@@ -96,7 +106,9 @@ function askedOn(lines: readonly Line[], tables: readonly Table<FoundLabel>[], p
         if (!spot) return;
         const values = valuesOf({ label, until, segment, place, index, lines, labelled });
         const section = sectionBeside(lines, index, segment, row.slice(0, place)) ?? null;
-        const before = segment.text.slice(0, label.start);
+        // At the foot of a page its whole line tells what a number is of.
+        const left = segment.box[1] > FOOT * height ? row.slice(0, place).map((one) => one.segment.text) : [];
+        const before = [...left, segment.text.slice(0, label.start)].join(' ');
         asked.push({
           label,
           spot,
@@ -163,6 +175,19 @@ const startsLevel = ({ box }: Segment, below: Segment): boolean =>
 
 const closeBy = ({ box }: Segment, next: Segment): boolean => next.box[0] - box[2] < 4 * heightOf(box);
 
+/** "Method 1 Type 2" is what "Class" asks for, and no question. */
+const isPartOf = (first: FoundLabel, asking: FoundLabel): boolean =>
+  first.key === asking.key ||
+  (DESIGNATES.has(first.key) && (DESIGNATES.has(asking.key) || asking.key === 'condition'));
+const DESIGNATES: ReadonlySet<LabelKey> = new Set([
+  'class_type',
+  'method',
+  'sensitivity',
+  'ndt_type',
+  'personnel_level',
+  'specification',
+]);
+
 /** A label and a figure for it in one place; least and most belong to the readings before them. */
 const saysValue = ({ start, end, words }: FoundLabel, text: string): boolean =>
   start < 4 && !/^(?:min|max)/.test(words) && /\d/.test(text.slice(end));
@@ -173,7 +198,7 @@ function toTheRight({ label, labelled, index, place }: Place): Segment[] {
   for (const { segment, labels, isLabel } of (labelled[index] ?? []).slice(place + 1)) {
     // A label with its value in one place, without a colon: "Delay 7 s".
     const [first] = labels;
-    if (isLabel || (first && first.key !== label.key && saysValue(first, segment.text))) break;
+    if (isLabel || (first && !isPartOf(first, label) && saysValue(first, segment.text))) break;
     if (/[\p{L}\p{N}]/u.test(segment.text)) following.push(segment);
   }
   return following;
@@ -200,116 +225,4 @@ function belowIt({ segment, index, lines, labelled }: Place): Segment | null {
     return found.isLabel ? null : found.segment;
   }
   return null;
-}
-
-/** What is asked of a step left of a label on its line is asked of the label's step too, when its heading is nearer. */
-function sectionBeside(
-  lines: readonly Line[],
-  index: number,
-  segment: Segment,
-  left: readonly Labelled[],
-): Step | null {
-  const own = headingAbove(lines, index, segment);
-  const beside = left
-    .filter(({ labels }) => labels.some(({ key }) => OF_A_STEP.has(key)))
-    .map((one) => headingAbove(lines, index, one.segment))
-    .reduce((near, one) => (one.line > near.line ? one : near), own);
-  return beside.step;
-}
-
-const OF_A_STEP: ReadonlySet<LabelKey> = new Set(['temperature', 'minutes', 'time_in', 'time_out', 'date']);
-
-/** The step that the nearest heading above speaks of. */
-const sectionOf = (lines: readonly Line[], index: number, segment: Segment): Step | null =>
-  headingAbove(lines, index, segment).step;
-
-interface HeadingAbove {
-  readonly step: Step | null;
-  /** Index of its line; -1 where there is none. */
-  readonly line: number;
-}
-
-function headingAbove(lines: readonly Line[], index: number, segment: Segment): HeadingAbove {
-  for (let above = index; above >= 0; above -= 1) {
-    const line = lines[above];
-    // A choice of processes is no heading.
-    if (!line || line.segments.filter(({ text }) => stepsIn(text).length > 0).length > 2) continue;
-    for (const other of line.segments) {
-      if (other === segment || !isHeading(other, line, above === index ? segment : null)) continue;
-      if (answersLabel(other, line)) continue;
-      const beside = above !== index && sharedAcross(other.box, segment.box) <= 0 && line.segments.length > 1;
-      if (beside) continue;
-      const steps = stepsIn(other.text);
-      const [step] = steps;
-      if (step) return { step: steps.length === 1 ? step.step : null, line: above };
-      if (line.segments.length === 1) return { step: null, line: above };
-    }
-  }
-  return { step: null, line: -1 };
-}
-
-/** Words right of a label are its value: the name of a process says what the certificate is of, not where a part begins. */
-function answersLabel(other: Segment, { segments }: Line): boolean {
-  const before = segments[segments.indexOf(other) - 1];
-  return before !== undefined && labelAtStart(before.text)?.whole === true;
-}
-
-/** A few words without figures that are no label of a value beside them. Left of the label on its own line also counts. */
-function isHeading(other: Segment, line: Line, onLineOf: Segment | null): boolean {
-  if (onLineOf && other.box[0] > onLineOf.box[0]) return false;
-  const text = other.text.trim().replace(/^(?:section |part )?(?:\d{1,2}|[A-Z])[.)\s]\s*/i, '');
-  if (/\d{2}/.test(text) || other.words.length > 7) return false;
-  const label = labelAtStart(text);
-  const steps = stepsIn(text);
-  if (steps.length > 0)
-    return (
-      label === null ||
-      label.key === 'process' ||
-      label.key === 'bake' ||
-      label.key === 'condition' ||
-      !label.marked
-    );
-  return label === null && line.segments.length === 1 && /^[\p{L}\s&/,.:()\-–]+$/u.test(text);
-}
-
-/** Lines that run on in the next one. A line runs on when it is a sentence's and reaches as far right as its neighbours. */
-const paragraphsOf = (lines: readonly Line[]): Passage[] =>
-  paragraphLines(lines).map((part) => joined(part.flatMap(({ segments }) => segments)));
-
-function paragraphLines(lines: readonly Line[]): Line[][] {
-  const paragraphs: Line[][] = [];
-  for (const line of lines) {
-    const open = paragraphs[paragraphs.length - 1];
-    const last = open?.[open.length - 1];
-    if (open && last && runsOn(last, line)) open.push(line);
-    else paragraphs.push([line]);
-  }
-  return paragraphs;
-}
-
-function runsOn(last: Line, line: Line): boolean {
-  const words = last.segments.reduce((sum, { words }) => sum + words.length, 0);
-  const close = line.box[1] - last.box[3] < 1.1 * Math.max(last.height, line.height);
-  const level = Math.abs(line.box[0] - last.box[0]) < 3 * last.height;
-  const wide = last.box[2] - last.box[0] > 22 * last.height || words > 8;
-  const prose = last.segments.length <= 2 && words >= 5;
-  const [first] = line.segments;
-  const label = first ? labelAtStart(first.text) : null;
-  const before = labelAtStart(last.segments[0]?.text ?? '');
-  // Fields and items of a list, each with a label before it.
-  const goesOn = /(?:[,;:–-]|\b(?:and|or|of|the|to|at|on|in|by|per|under|its|our|your|no\.?))$/i.test(
-    last.segments[last.segments.length - 1]?.text ?? '',
-  );
-  if (!goesOn && label && before) return false;
-  if (line.segments.length > 2) return false;
-  const listed = /^\s*(?:[-–•*·]|\d{1,2}[.)])\s/.test(first?.text ?? '');
-  return (
-    close &&
-    level &&
-    wide &&
-    prose &&
-    !listed &&
-    !(label?.marked ?? false) &&
-    !(label?.whole && line.segments.length > 1)
-  );
 }

@@ -44,6 +44,10 @@ export function readSignature(paper: Paper): ReadSignature {
     const scrawl = scrawlAt(paper, place);
     if (scrawl) return { present: true, spot: scrawl, belief: 0.8 };
   }
+  for (const place of nearby) {
+    const words = misreadWordsAt(paper, place);
+    if (words) return { present: true, spot: words, belief: 0.75 };
+  }
   const script = scriptedName(paper);
   if (script) return { present: true, spot: script, belief: 0.85 };
   const loose = places.length === 0 ? looseStroke(paper) : null;
@@ -130,6 +134,24 @@ function scriptedName(paper: Paper): Spot | null {
   return null;
 }
 
+/** What recognition makes of "/s/" before a name: "Is/", "S/T.". */
+const MISREAD_S = /^[/Il1|!([{]?\s?[sS5$]\s?[/Il1|!)\]}]\s?(?=\p{Lu})/u;
+
+function misreadWordsAt(paper: Paper, { label, page }: Answer): Spot | null {
+  const sheet = paper.sheets.find((one) => one.page === page);
+  if (!sheet || !label || sheet.origin !== 'recognised') return null;
+  const room = roomFor(label.box);
+  for (const { segments } of sheet.lines)
+    for (const segment of segments)
+      if (
+        MISREAD_S.test(segment.text) &&
+        sharedAcross(segment.box, room) > 0 &&
+        sharedDown(segment.box, room) > 0.4 * heightOf(segment.box)
+      )
+        return spotIn(segment, 0, segment.text.length);
+  return null;
+}
+
 /** A picture of a signature or a stamp, not of the page. */
 const isSmall = (box: Box, { width, height }: Sheet): boolean =>
   widthOf(box) < 0.5 * width && heightOf(box) < 0.2 * height;
@@ -139,12 +161,27 @@ function looseStroke(paper: Paper): Spot | null {
   for (const sheet of paper.sheets) {
     const mark = sheet.marks.find(
       ({ kind, box }) =>
-        kind === 'stroke' && box[1] > 0.25 * sheet.height && widthOf(box) > 25 && heightOf(box) > 6,
+        box[1] > 0.25 * sheet.height &&
+        widthOf(box) > 25 &&
+        heightOf(box) > 6 &&
+        (kind === 'stroke' || (kind === 'picture' && isSmall(box, sheet) && isOverName(box, sheet))),
     );
     if (mark) return spotOfMark(sheet, mark);
   }
   return null;
 }
+
+/** A person's name stands right under it. */
+const isOverName = (box: Box, { lines }: Sheet): boolean =>
+  lines.some(({ segments }) =>
+    segments.some(
+      (segment) =>
+        NAME.test(segment.text) &&
+        segment.box[1] > box[1] &&
+        segment.box[1] - box[3] < 30 &&
+        sharedAcross(segment.box, box) > 0,
+    ),
+  );
 
 const spotOfMark = ({ page }: Sheet, { box }: Mark): Spot => ({ raw: '', page, box, legible: 1 });
 

@@ -3,9 +3,10 @@ import type { Box } from '../../page';
 import { boxThrough, intersection } from '../box';
 import { drawText, type Glyph } from './draw-text';
 import { flattenPath } from './draw-path';
-import type { Colour, Drawn, DrawnPath, DrawnPicture, DrawnRun } from './drawn';
+import type { Drawn, DrawnPath, DrawnPicture, DrawnRun } from './drawn';
 import { initialState, type FontMetrics, type GraphicsState } from './graphics-state';
 import { compose, IDENTITY, type Matrix } from './matrix';
+import { isNumbers, nameIn, sizeOf, toBox, toColour, toMatrix, toNumber } from './operands';
 
 /** What the replay needs from the page it replays. */
 export interface Stage {
@@ -46,23 +47,6 @@ export function replay(
     player.play(operators.fnArray[i] ?? 0, Array.isArray(args) ? (args as unknown[]) : [], i);
   }
   return player.drawn;
-}
-
-type Numbers = readonly number[];
-const isNumbers = (value: unknown): value is Numbers =>
-  value instanceof Float32Array || (Array.isArray(value) && value.every((n) => typeof n === 'number'));
-const toMatrix = (value: unknown): Matrix | null =>
-  isNumbers(value) && value.length >= 6 ? (Array.from(value).slice(0, 6) as unknown as Matrix) : null;
-const toBox = (value: unknown): Box | null =>
-  isNumbers(value) && value.length >= 4 ? (Array.from(value).slice(0, 4) as unknown as Box) : null;
-const toNumber = (value: unknown): number =>
-  typeof value === 'number' && Number.isFinite(value) ? value : 0;
-
-function toColour(value: unknown): Colour {
-  const hex = typeof value === 'string' ? /^#([0-9a-f]{6})$/i.exec(value)?.[1] : undefined;
-  if (!hex) return null;
-  const n = parseInt(hex, 16);
-  return [n >> 16, (n >> 8) & 255, n & 255];
 }
 
 class Player {
@@ -197,12 +181,6 @@ class Player {
 }
 
 type Action = (player: Player, args: readonly unknown[], order: number) => void;
-
-const nameIn = (value: unknown): string | null => (typeof value === 'string' ? value : null);
-const sizeOf = (value: unknown) => {
-  const { width, height } = (value ?? {}) as { width?: unknown; height?: unknown };
-  return { pixelsWide: toNumber(width), pixelsHigh: toNumber(height) };
-};
 
 /** A picture repeated at many places: each place is one picture. */
 const paintRepeated =
