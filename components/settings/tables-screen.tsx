@@ -64,7 +64,7 @@ function TableRow({ table: { tableId, title, own, published, rows } }: { table: 
       <Cell figure head="Rows">
         {rows}
       </Cell>
-      <Cell head="Entered">
+      <Cell head="Entered" className="lg:w-44">
         {own === null ? (
           <span className="text-quiet">published</span>
         ) : (
