@@ -14,10 +14,10 @@ import { documentOf } from '@/lib/reference/own-table';
 type Listed = OutputOf<typeof listReferenceTables>['subjects'][number]['tables'][number];
 
 const COLUMNS = [
-  { says: 'Table' },
+  { says: 'Table', className: 'w-2/5' },
   { says: 'Edition in force' },
   { says: 'Rows', right: true },
-  { says: 'Entered' },
+  { says: 'Entered', className: 'w-44' },
 ];
 
 /** Every table that answers are read from, with the edition in force; the shop's own are marked. */
@@ -49,7 +49,7 @@ function TableRow({ table: { tableId, title, own, published, rows } }: { table: 
   const clock = useClock();
   return (
     <Row>
-      <Cell strong className="w-2/5">
+      <Cell strong>
         <Link href={`/settings/tables/${tableId}`}>{title}</Link>
       </Cell>
       <Cell head="Edition in force" className="[overflow-wrap:anywhere]">
@@ -64,7 +64,7 @@ function TableRow({ table: { tableId, title, own, published, rows } }: { table: 
       <Cell figure head="Rows">
         {rows}
       </Cell>
-      <Cell head="Entered" className="lg:w-44">
+      <Cell head="Entered">
         {own === null ? (
           <span className="text-quiet">published</span>
         ) : (
