@@ -39,18 +39,16 @@ export async function setRequirements(
     .orderBy(asc(requirements.seq));
   await ctx.tx.delete(requirements).where(these);
   if (asked.length > 0) {
-    await ctx.tx
-      .insert(requirements)
-      .values(
-        asked.map((one, at) => ({
-          id: newId(),
-          shopId: shopOf(ctx),
-          batchId,
-          lineId,
-          seq: at + 1,
-          ...asRead(one),
-        })),
-      );
+    await ctx.tx.insert(requirements).values(
+      asked.map((one, at) => ({
+        id: newId(),
+        shopId: shopOf(ctx),
+        batchId,
+        lineId,
+        seq: at + 1,
+        ...asRead(one),
+      })),
+    );
   }
   await recordAudit(ctx, {
     action: 'batch.set_requirements',

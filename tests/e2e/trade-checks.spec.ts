@@ -74,9 +74,9 @@ test('a quench delay from the own procedure is entered, cited by the batch, and 
   await owner.sees(page.getByText(/thin is not what stands here/));
   await owner.gives(chosen, 'delays.csv', Buffer.from('from (in),max (s)\r\n0,4\r\n0.032,6\r\n'));
   await owner.sees(page.getByText(/2 rows, nothing is wrong/));
-  await owner.type(page.getByLabel('Specification'), 'Own procedure HT-12');
-  await owner.type(page.getByLabel('Edition'), 'issue 3');
-  await owner.type(page.getByLabel('Clause'), 'Table 2');
+  await owner.type(page.getByLabel('Specification', { exact: true }), 'Own procedure HT-12');
+  await owner.type(page.getByLabel('Edition', { exact: true }), 'issue 3');
+  await owner.type(page.getByLabel('Clause', { exact: true }), 'Table 2');
   await owner.press(page.getByRole('button', { name: 'Enter 2 rows' }));
   await owner.sees(page.getByText('Your own: Own procedure HT-12, issue 3, Table 2.'));
   await owner.looks('own-table');
