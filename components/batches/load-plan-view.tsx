@@ -135,15 +135,21 @@ function Solution({ solution, units }: { solution: NonNullable<PlannedLoad['solu
         )}
       </p>
       {longestMin !== null && (
-        <p className="text-second text-dispatched-ink">{`window ${longestMin - soakMin} min wide: the clad ends it`}</p>
+        <p className="text-second text-dispatched-ink">
+          {longestMin === soakMin
+            ? 'the clad may have no minute more'
+            : `window ${longestMin - soakMin} min wide: the clad ends it`}
+        </p>
       )}
     </>
   );
 }
 
-/** `soak 30 to 35 min`, `soak 55 min or more` */
-const soakWords = ({ soakMin, longestMin }: { soakMin: number; longestMin: number | null }): string =>
-  longestMin === null ? `soak ${soakMin} min or more` : `soak ${soakMin} to ${longestMin} min`;
+/** `soak 30 to 35 min`, `soak 40 min exactly`, `soak 55 min or more` */
+function soakWords({ soakMin, longestMin }: { soakMin: number; longestMin: number | null }): string {
+  if (longestMin === null) return `soak ${soakMin} min or more`;
+  return longestMin === soakMin ? `soak ${soakMin} min exactly` : `soak ${soakMin} to ${longestMin} min`;
+}
 
 function spanText([low, high]: readonly [number, number], units: Units): string {
   const [from, to] = [temperatureText(low, units), temperatureText(high, units)];

@@ -82,6 +82,7 @@ function barOf(from: number, to: number, top: number, closed: boolean): string {
   return `M${to} ${high}H${from}V${low}H${to}${closed ? 'Z' : ''}`;
 }
 
+/** The last one bears the unit: on a phone there is no room for both. */
 function SoakTicks({ scale: { to, step } }: { scale: SoakScale }) {
   const ticks = Array.from({ length: Math.floor(to / step) + 1 }, (_, at) => at * step);
   return (
@@ -92,7 +93,7 @@ function SoakTicks({ scale: { to, step } }: { scale: SoakScale }) {
           className={`absolute bottom-0 font-mono text-[11px] text-faint ${edgeOf(at, to)}`}
           style={{ left: `${(100 * at) / to}%` }}
         >
-          {at === to ? `${at} min` : at}
+          {at === to ? 'min' : at}
         </span>
       ))}
     </div>

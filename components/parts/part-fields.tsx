@@ -22,7 +22,7 @@ export function IdentityFields({ frozen }: { frozen: Frozen }) {
   const [made, end] = useWatch({ control, name: ['madeCondition', 'endCondition'] });
   return (
     <Section title="The part">
-      <div className="grid grid-cols-6 gap-x-4 gap-y-3 py-2 max-md:grid-cols-2">
+      <div className="grid grid-cols-6 gap-x-4 gap-y-3 py-2 max-lg:grid-cols-4 max-md:grid-cols-2">
         <TextField
           className="col-span-2"
           label="Drawing number"
@@ -33,7 +33,7 @@ export function IdentityFields({ frozen }: { frozen: Frozen }) {
           {...register('number')}
         />
         <TextField
-          className="max-md:col-span-2"
+          className="max-lg:col-span-2"
           label="Revision"
           mono
           autoComplete="off"
@@ -42,7 +42,7 @@ export function IdentityFields({ frozen }: { frozen: Frozen }) {
           {...register('revision')}
         />
         <TextField
-          className="col-span-3 max-md:col-span-2"
+          className="col-span-3 max-lg:col-span-4 max-md:col-span-2"
           label="Name"
           autoComplete="off"
           error={errors.name?.message}
@@ -73,6 +73,7 @@ export function IdentityFields({ frozen }: { frozen: Frozen }) {
           {...register('thickness')}
         />
         <TextField
+          className="max-lg:col-span-2 max-md:col-span-1"
           label="Made in"
           mono
           hint="O"
@@ -82,6 +83,7 @@ export function IdentityFields({ frozen }: { frozen: Frozen }) {
           {...register('madeCondition')}
         />
         <TextField
+          className="max-lg:col-span-2 max-md:col-span-1"
           label="Must end in"
           mono
           hint="T42"

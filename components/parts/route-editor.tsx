@@ -97,7 +97,7 @@ function StepFields({ at, isLast, isUsed, onUp, onDown, onRemove }: StepFieldsPr
             )}
           </span>
         </div>
-        <div className="grid grid-cols-6 gap-x-4 gap-y-3 pt-1.5 max-md:grid-cols-2">
+        <div className="grid grid-cols-6 gap-x-4 gap-y-3 pt-1.5 max-lg:grid-cols-4 max-md:grid-cols-2">
           <SelectField
             className="col-span-2"
             label="Process"

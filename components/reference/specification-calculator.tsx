@@ -57,7 +57,7 @@ export function SpecificationCalculator({ given }: { given: Given }) {
           options={optionsOf(COVERAGE_WORDS)}
           {...bench.choice('covers')}
         />
-        <DateField label="Order of" hint="empty: as known today" {...bench.choice('on')} />
+        <DateField label="Order of" hint="empty: as known today" className="wide" {...bench.choice('on')} />
       </BenchFieldRow>
       <Called bench={bench} />
       <SpecificationTables />

@@ -3,7 +3,7 @@ import type { KeptApart } from '@/lib/trade/heat-treat/load-plan';
 
 import { APART_WORDS } from './apart-words';
 import { groupedBy } from './grouped-by';
-import { kindOf, loadsOfBatch, type LoadLine, type NotPlanned } from './loads-of-batch';
+import { kindOf, loadsOfBatch, type LoadLine, type LoadsOfBatch, type NotPlanned } from './loads-of-batch';
 import { notPlannedWords } from './not-planned-words';
 
 /** The furnace load of a batch that a waiting lot could join, by its number in the plan; else why there is none. */
@@ -36,9 +36,17 @@ export function loadsToJoin(
     const plans = loads.map((load) => loadsOfBatch(tables, [...load, waiting]));
     const at = plans.findIndex((plan) => plan?.loads.length === 1);
     if (at >= 0) return { number: at + 1 };
-    return { number: null, because: plans[0]?.apart[0]?.reason ?? 'no_load_yet' };
+    const against = plans.flatMap((plan) => plan?.apart ?? []).filter(isAbout(waiting));
+    // Beside one kind alone it may be fine; what keeps it out of the load is the kind that it cannot share with.
+    const reason = against.find((one) => one.reason !== 'fits_but_planned_apart') ?? against[0];
+    return { number: null, because: reason?.reason ?? 'no_load_yet' };
   };
 }
+
+const isAbout =
+  ({ id }: LoadLine) =>
+  ({ between }: LoadsOfBatch<LoadLine>['apart'][number]): boolean =>
+    between.flat().some((line) => line.id === id);
 
 /** `load 2`, or why it would take a load of its own. */
 export function loadToJoinWords(found: LoadToJoin): string {

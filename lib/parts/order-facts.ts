@@ -10,7 +10,7 @@ export function orderFactsOf(classType: string): OrderFact[] {
   ];
 }
 
-/** What the order states with those words: `Type III Class 2` states the type and the class. */
+/** What those words state on the order: `Type III Class 2` states the type and the class. */
 export function orderItemsOf(classType: string): OrderItem[] {
   const says = (item: OrderItem, word: RegExp): OrderItem[] => (word.test(classType) ? [item] : []);
   return [

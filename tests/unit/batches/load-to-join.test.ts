@@ -42,6 +42,14 @@ describe('the load that a waiting lot could join', () => {
       /^a load of its own: their solution temperatures meet/,
     ));
 
+  test('the reason is that of the line it cannot share with, not of the one it could', () =>
+    expect(
+      joins(
+        [sheet({ thicknessMm: 3.175 }), sheet({ clad: true, thicknessMm: 1.27 })],
+        sheet({ thicknessMm: 6.3 }),
+      ),
+    ).toBe('a load of its own: clad sheet would soak longer than it may beside the thicker section'));
+
   test('is one of its own on a batch that has no line yet', () =>
     expect(joins([], sheet())).toBe('a load of its own'));
 
