@@ -1,4 +1,5 @@
 import type { ChildProcess } from 'node:child_process';
+import { once } from 'node:events';
 import { loadavg } from 'node:os';
 
 import { count, eq } from 'drizzle-orm';
@@ -70,6 +71,7 @@ async function main(): Promise<void> {
     print(idle, reading, `${SCANS - (await waiting())} of ${SCANS} scans read in ${seconds} s`);
   } finally {
     end();
+    await Promise.all(processes.map((one) => one.exitCode ?? once(one, 'exit')));
     await Promise.all([app.pool.end(), owner.pool.end()]);
     await database.drop();
   }
