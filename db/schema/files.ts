@@ -1,5 +1,16 @@
 import { sql } from 'drizzle-orm';
-import { bigint, foreignKey, index, pgEnum, pgPolicy, pgTable, text, unique, uniqueIndex, uuid } from 'drizzle-orm/pg-core';
+import {
+  bigint,
+  foreignKey,
+  index,
+  pgEnum,
+  pgPolicy,
+  pgTable,
+  text,
+  unique,
+  uniqueIndex,
+  uuid,
+} from 'drizzle-orm/pg-core';
 
 import { FILE_PURPOSES, FILE_STATES } from '@/lib/files/purpose';
 

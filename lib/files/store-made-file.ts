@@ -62,10 +62,7 @@ export async function storeMadeFile(
       });
       return { fileId: id, sha256 };
     }
-    const [here] = await ctx.tx
-      .select({ id: files.id })
-      .from(files)
-      .where(eq(files.storageKey, storageKey));
+    const [here] = await ctx.tx.select({ id: files.id }).from(files).where(eq(files.storageKey, storageKey));
     if (!here) throw new Error(`file ${storageKey} is neither new nor here`);
     return { fileId: here.id, sha256 };
   });
