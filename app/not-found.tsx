@@ -1,15 +1,12 @@
-import { ButtonLink } from '@/components/ui/button';
+import { NotYours } from '@/components/shell/not-yours';
 import { PublicHead } from '@/components/shell/public-head';
 
-/** Not yours and not there are one sentence, so that nothing can be guessed from the difference. */
 export default function NotFound() {
   return (
     <>
       <PublicHead />
       <main className="px-6 py-9 max-md:px-4">
-        <h1>You may not see this page</h1>
-        <p className="py-3 text-quiet">It belongs to another shop, or it does not exist.</p>
-        <ButtonLink href="/">To the tideline</ButtonLink>
+        <NotYours />
       </main>
     </>
   );

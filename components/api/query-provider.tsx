@@ -15,6 +15,8 @@ export function QueryProvider({ children }: { children: ReactNode }) {
             retry: (count, error) =>
               count < 3 && (!(error instanceof ApiError) || [0, 503].includes(error.problem.status)),
           },
+          // Without a network a press is answered too: one that waited unseen would pay or dispatch when nobody expects it.
+          mutations: { networkMode: 'always' },
         },
       }),
   );

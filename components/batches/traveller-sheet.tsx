@@ -35,7 +35,7 @@ export function TravellerSheet({ says, small = false }: { says: TravellerSays; s
         {PROCESS_WORDS[says.process]}, {says.specification}. {pieces.toLocaleString('en-US')} pieces.
       </p>
       {says.changes.length > 0 && (
-        <p className="mt-2 border-l-4 border-current pl-2">{`Different from version ${says.documentVersion - 1}: ${says.changes.join('; ')}.`}</p>
+        <p className="mt-2 border-l-4 border-current pl-2">{`Different from version ${says.documentVersion - 1}: ${says.changes.join('; ').replace(/\.$/, '')}.`}</p>
       )}
       <SheetLines lines={says.lines} small={small} />
       {says.note && <p className="mt-2">{says.note}</p>}

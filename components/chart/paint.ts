@@ -39,7 +39,7 @@ export function paintMarks(plot: uPlot, drawing: ChartDrawing, palette: Palette,
   ctx.lineWidth = size;
   const ends = soak ? [x(soak.from), x(soak.to)].filter(isSeen) : [];
   for (const end of ends)
-    line(ctx, [end, bbox.top - (inWords ? 12 * size : 0)], [end, bbox.top + bbox.height]);
+    line(ctx, [end, bbox.top - (inWords ? 8 * size : 0)], [end, bbox.top + bbox.height]);
   if (inWords) {
     // What is drawn before may have left another: the words stand on their line. Below 14.5 px the i loses its dot.
     ctx.textBaseline = 'alphabetic';

@@ -9,6 +9,11 @@ interface PersonMenuProps {
 }
 
 const ID = 'person-menu';
+const NAMED_AT_MOST = 2;
+
+/** Whoever holds many roles is no better known by a cut list of them. */
+const rolesWords = (roles: readonly string[]): string =>
+  roles.length > NAMED_AT_MOST ? `, ${roles.length} roles` : roles.map((role) => `, ${role}`).join('');
 
 /** The platform opens and closes it, so it works before any script has come. */
 export function PersonMenu({ organisation, person, roles, children }: PersonMenuProps) {
@@ -22,7 +27,7 @@ export function PersonMenu({ organisation, person, roles, children }: PersonMenu
         <span className="max-w-52 truncate font-cond text-caption text-faint">{organisation}</span>
         <span className="max-w-52 truncate text-row font-medium">
           {person}
-          {roles.length > 0 && `, ${roles.join(', ')}`}
+          {rolesWords(roles)}
         </span>
       </button>
       <div

@@ -2,6 +2,8 @@
 
 import { useEffect, useRef } from 'react';
 
+import { momentWords } from '@/lib/day-words';
+
 interface PrintFootProps {
   organisation: string;
   person: string;
@@ -13,7 +15,8 @@ export function PrintFoot({ organisation, person }: PrintFootProps) {
   useEffect(() => {
     const write = () => {
       if (!page.current) return;
-      page.current.textContent = `${document.title}, ${window.location.pathname}, ${new Date().toLocaleString('en-GB')}`;
+      const [now, zone] = [new Date(), Intl.DateTimeFormat().resolvedOptions().timeZone];
+      page.current.textContent = `${document.title}, ${window.location.pathname}, ${momentWords(now, { zone, now })}`;
     };
     window.addEventListener('beforeprint', write);
     return () => window.removeEventListener('beforeprint', write);
@@ -23,7 +26,7 @@ export function PrintFoot({ organisation, person }: PrintFootProps) {
       <span>
         {organisation}. <span ref={page} />. {person}.
       </span>
-      <span>printed copy</span>
+      <span className="whitespace-nowrap">printed copy</span>
     </div>
   );
 }

@@ -79,7 +79,8 @@ function valueWords(value: unknown): string | null {
 }
 
 const ID = /^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/;
-const isId = (value: unknown): boolean => typeof value === 'string' && ID.test(value);
+const isId = (value: unknown): boolean =>
+  Array.isArray(value) ? value.length > 0 && value.every(isId) : typeof value === 'string' && ID.test(value);
 
 /** What is nothing or an id inside a thing tells a reader nothing; the entry itself keeps it. */
 function objectWords(value: object): string {

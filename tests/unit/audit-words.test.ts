@@ -32,7 +32,11 @@ test('lists and things inside are words too, without ids and without nothing', (
 
 test('an id of its own is no change that a reader could read', () =>
   expect(
-    changesBetween(null, { number: 'B-0060', processorId: '01a23042-b8c2-71fc-92a8-183aa52375a4' }),
+    changesBetween(null, {
+      number: 'B-0060',
+      processorId: '01a23042-b8c2-71fc-92a8-183aa52375a4',
+      links: ['01a23042-b8c2-71fc-92a8-183aa52375a4'],
+    }),
   ).toEqual([{ field: 'number', before: null, after: 'B-0060' }]));
 
 test('an action is told as what was done, and what is no verb stays as it is', () => {
