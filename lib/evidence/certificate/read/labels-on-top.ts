@@ -4,7 +4,7 @@ import type { Box } from '../../page';
 import { labelAtStart } from './find-labels';
 
 /** How much nearer a line of labels is to the values above it than to what is below, where they are its values. */
-const NEARER = 0.7;
+const NEARER = 0.85;
 
 /**
  * Lines of a form whose labels stand under their values, in the order of other forms: the labels first. The words keep their
