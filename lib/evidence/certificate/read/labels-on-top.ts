@@ -27,7 +27,7 @@ export function labelsOnTop(lines: readonly Line[]): Line[] {
     const above = labels.box[1] - values.box[3];
     const below = next ? next.box[1] - labels.box[3] : Infinity;
     const anotherForm = next !== undefined && standUnder(next, labels);
-    if (above > NEARER * below || (!anotherForm && above > labels.height)) continue;
+    if (above > NEARER * below || (!anotherForm && above > 1.4 * labels.height)) continue;
     count += 1;
     turned[at - 1] = movedTo(labels, values.box, at - 1);
     turned[at] = movedTo(values, labels.box, at);
