@@ -161,13 +161,7 @@ function tableUnder<Heading>(
   let to = at + height;
   for (; to < lines.length; to += 1) {
     const [line, above] = [lines[to], lines[to - 1]];
-    if (
-      !line ||
-      !above ||
-      tooFar(line, above, rows.length > 1 ? rows : []) ||
-      endsAt(lines, to, columns, reader)
-    )
-      break;
+    if (!line || !above || tooFar(line, above, rows) || endsAt(lines, to, columns, reader)) break;
     const cells = cellsOf(line, columns);
     if (rows.length > 0 && reader.isRow) {
       const whole = cells.map((cell) => (cell.length === 0 ? null : joined(cell)));
@@ -211,7 +205,9 @@ function tooFar(line: Line, above: Line, rows: readonly { readonly box: Box }[])
   const gap = line.box[1] - above.box[3];
   const [first, second] = rows;
   const usual = first && second ? second.box[1] - first.box[3] : 0;
-  return gap > Math.max(2.6 * Math.min(line.height, above.height), 1.7 * usual);
+  // Between a heading and its first row a line may have been drawn.
+  const most = first ? 2.6 : 3.4;
+  return gap > Math.max(most * Math.min(line.height, above.height), 1.7 * usual);
 }
 
 function endsAt<Heading>(

@@ -68,7 +68,7 @@ export function answersOf(sheets: readonly Sheet[]): Answer[] {
 }
 
 const REGISTERED =
-  /\b(?:AS\s?9\d{3}|EN\s?9\d{3}|ISO|nadcap|regist\w+|accredit\w+|A2LA|approv\w+ to|FAA|EASA|repair station|cage)\b/i;
+  /\b(?:(?:AS|EN)\s?9\d{3}|(?:[I1l]SO|nadcap|regist\w+|accredit\w+|A2LA|approv\w+ to|FAA|EASA|repair station|cage)\b)/i;
 
 type LabelTable = Table<FoundLabel>;
 

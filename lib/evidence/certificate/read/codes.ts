@@ -117,7 +117,7 @@ function answersOther(text: string): boolean {
 /** The letter or number of a revision. */
 export function revisionIn(passage: Passage): Reading<string> | null {
   const match =
-    /^[\s"“(]*(?:(?:rev(?:ision)?|issue|iss)\b[.:\s]*)?([A-Z]{1,2}|\d{1,3}|-|N\/?C|NEW)[\s"”).,;]*$/i.exec(
+    /^[\s"“(/]*(?:(?:rev(?:ision)?|issue|iss)\b[.:\s]*)?([A-Z]{1,2}|\d{1,3}|-|N\/?C|NEW)[\s"”).,;]*$/i.exec(
       passage.text,
     );
   const value = match?.[1]?.toUpperCase();

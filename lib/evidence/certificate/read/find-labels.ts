@@ -29,7 +29,7 @@ const LEAD = /^\s*(?:\d{1,2}[.)]\s*|[a-z]\)\s*|\(\s*[\da-z]{1,2}\s*\)\s*|[•*�
 const MARK = /^\s*(?:[.·…_]{2,}\s*:?|(?:\s\.){2,}\s*:?|[:;=]+|\s[-–—]+\s|[-–—]>|»|\|)\s*(?:[.·…_]{3,}\s*)?/;
 
 const UNIT =
-  /^[,\s]*(?:[({]([^(){}]{1,40})[)}]|\[([^[\]]{1,40})\]|((?:in\s+)?(?:°\s?[FC]|deg\.?\s?[FC]|[FC]|HR(?:[A-H]|15T|30T|15N|30N|45N)W?|HV\s?\d{0,2}|HBW?|%\s?IACS|IACS|MS\/m|µ-?in|μ-?in|uin|microinch(?:es)?|mils?|µm|μm|um|mm|inch(?:es)?|ksi|MPa|min|mins|minutes|hrs?|hours|h|sec|seconds|s|pcs|ea|%)\.?)(?=\s*(?:[:;=]|$)))/i;
+  /^[,\s]*(?:[({]([^(){}]{1,40})[)}]|\[([^[\]]{1,40})\]|((?:in\s+)?(?:°\s?[FC]|deg\.?\s?[FC]|[FC]|HR(?:[A-H]|15T|30T|15N|30N|45N)W?|HV\s?\d{0,2}|HBW?|%\s?IACS|IACS|MS\/m|µ-?in|μ-?in|uin|microinch(?:es)?|mils?|µm|μm|um|mm|inch(?:es)?|ksi|MPa|min|mins|minutes|hrs?|hours|h|sec|seconds|s|pcs|ea|%)\.?)(?=\s*(?:[:;=]|\.{2}|…|$)))/i;
 
 /** The label that a text begins with; null where it begins with none. */
 export function labelAtStart(text: string): FoundLabel | null {

@@ -35,6 +35,8 @@ const FIRST: Readonly<Record<string, readonly string[]>> = {
 };
 
 const BETWEEN = String.raw`[\s./_\-]{0,3}`;
+/** Recognition makes an l of a stroke: "AlloylTemper"; folded texts have an i for it. */
+const SLIPPED = String.raw`(?:${BETWEEN}|i)`;
 
 function patternOf(words: readonly string[]): RegExp {
   const parts = words.map((word, index) => {
@@ -43,7 +45,9 @@ function patternOf(words: readonly string[]): RegExp {
     // As folded texts have it: no l.
     const group = /^[A-Z]+$/.test(plain) ? `(?:${(WORDS[plain] ?? '').replace(/l/g, 'i')})` : WORDS[plain];
     const said = group ?? folded(plain);
-    const before = index === 0 ? '' : BETWEEN;
+    const isLong = plain.length > 3 && (words[index - 1]?.length ?? 0) > 3;
+    const between = isLong ? SLIPPED : BETWEEN;
+    const before = index === 0 ? '' : between;
     return may ? `(?:${before}${said})?` : `${before}${said}`;
   });
   return new RegExp(`${parts.join('').replace(/\\{2}/g, '\\')}(?:(?<=#)|(?![a-z0-9]))`, 'y');

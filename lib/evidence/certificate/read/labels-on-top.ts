@@ -4,7 +4,7 @@ import type { Box } from '../../page';
 import { labelAtStart } from './find-labels';
 
 /** How much nearer a line of labels is to the values above it than to what is below, where they are its values. */
-const NEARER = 0.7;
+const NEARER = 0.85;
 
 /**
  * Lines of a form whose labels stand under their values, in the order of other forms: the labels first. The words keep their
@@ -27,7 +27,7 @@ export function labelsOnTop(lines: readonly Line[]): Line[] {
     const above = labels.box[1] - values.box[3];
     const below = next ? next.box[1] - labels.box[3] : Infinity;
     const anotherForm = next !== undefined && standUnder(next, labels);
-    if (above > NEARER * below || (!anotherForm && above > labels.height)) continue;
+    if (above > NEARER * below || (!anotherForm && above > 1.4 * labels.height)) continue;
     count += 1;
     turned[at - 1] = movedTo(labels, values.box, at - 1);
     turned[at] = movedTo(values, labels.box, at);

@@ -246,7 +246,7 @@ export const LABELS = {
     certifier, issued by, prepared by, name and title, name title, nom, nombre y apellido, prufer`,
   signer_title: `title, job title, position, function, funktion, fonction, capacity, role, cargo`,
   stamp: `stamp, inspection stamp, qc stamp, qa stamp, inspector stamp, stamp no, stempel, cachet`,
-  customer: `customer, customer name, customer address, sold to, ship to, shipped to, bill to, deliver to,
+  customer: `customer, cust, cust name, customer name, customer address, sold to, ship to, shipped to, bill to, deliver to,
     delivered to, issued to, certified to, client, client name, buyer, purchaser, to :, for :, attn,
     attention, attn :, kunde, auftraggeber, besteller, empfanger, an :, destinataire, donneur d ordre,
     cliente`,

@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { expect, test } from 'vitest';
 
 import type { StatedCertificate } from '@/lib/evidence/certificate/certificate';
-import { likeness } from '@/lib/evidence/certificate/match/alike';
+import { likeness, mayBeMisread } from '@/lib/evidence/certificate/match/alike';
 import { matchOrder } from '@/lib/evidence/certificate/match/match-order';
 import { areSameCompany } from '@/lib/evidence/certificate/match/same-company';
 import { namesOrder } from '@/lib/evidence/certificate/match/same-order-number';
@@ -140,3 +140,12 @@ test('each candidate says why', () => {
     'The process is the one ordered.',
   ]);
 });
+
+test.each([
+  ['WAS8643-4', 'WA8643-4', true],
+  ['WAQ087-6', 'WA9087-6', true],
+  ['WA8043-4', 'WA8643-4', false],
+  ['WA8634-4', 'WA8643-4', false],
+])('recognition may have made %s of %s: %s', (read, ordered, expected) =>
+  expect(mayBeMisread(read, ordered)).toBe(expected),
+);
