@@ -80,9 +80,13 @@ module.exports = {
     },
     {
       name: 'screens-read-the-tables-in-force',
-      comment: 'A shop may have its own edition of a table: screens of the shop ask useTables for it.',
+      comment:
+        'A shop may have its own edition of a table: screens of the shop ask useTables for it. The calculators of the bench, which need no shop, show the published ones.',
       severity: 'error',
-      from: { path: '^components/', pathNot: '^components/reference/use-tables' },
+      from: {
+        path: '^components/',
+        pathNot: '^components/reference/(use-tables|[a-z-]+-calculator)\\.tsx?$',
+      },
       to: { path: '^lib/reference/(published|batch)-tables' },
     },
     {

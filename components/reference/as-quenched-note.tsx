@@ -1,13 +1,15 @@
+'use client';
+
 import Link from 'next/link';
 
 import { Edge } from '@/components/ui/edge';
 import { materialOf, temperOf } from '@/lib/parts/material-of';
-import { PART_TABLES } from '@/lib/reference/published-tables';
 import { HOLDING_LIMITS } from '@/lib/trade/tables/holding-limits';
 import { isAsQuenched } from '@/lib/trade/tempers/temper';
 
 import { spanWords } from './bench-moment';
 import { SourceLine } from './source-line';
+import { useTables } from './use-tables';
 
 interface AsQuenchedNoteProps {
   /** As the part says it. */
@@ -18,9 +20,10 @@ interface AsQuenchedNoteProps {
 
 /** Of pieces that come back quenched and not aged: how long they keep soft, and the way to the clock. Else nothing. */
 export function AsQuenchedNote({ alloy, condition }: AsQuenchedNoteProps) {
-  const temper = condition === null ? undefined : temperOf(PART_TABLES.material.tempers, condition);
+  const { material } = useTables();
+  const temper = condition === null ? undefined : temperOf(material.tempers, condition);
   if (!temper || !isAsQuenched(temper)) return null;
-  const read = materialOf(PART_TABLES.material, { alloy, form: '', clad: false });
+  const read = materialOf(material, { alloy, form: '', clad: false });
   const row =
     read.known === 'yes'
       ? HOLDING_LIMITS.rows.find(({ alloys }) => alloys.includes(read.material.alloy))

@@ -4,6 +4,8 @@ import { CONVERSION_CLASSES } from '@/lib/trade/tables/conversion-classes';
 import { EXPOSURE_ITEMS, EXPOSURE_LIMITS } from '@/lib/trade/tables/exposure-limits';
 import { FINISH_DEFAULTS } from '@/lib/trade/tables/finish-defaults';
 import { MAGNETIC_PARTICLE_PLATING } from '@/lib/trade/tables/magnetic-particle-plating';
+import { PASSIVATION_BATHS } from '@/lib/trade/tables/passivation-baths';
+import { PASSIVATION_TESTS } from '@/lib/trade/tables/passivation-tests';
 import { PLATING_CLASSES } from '@/lib/trade/tables/plating-classes';
 
 import { replaceable } from '../replaceable';
@@ -14,8 +16,11 @@ import {
   fahrenheit,
   hours,
   inches,
+  minutes,
+  percent,
   span,
   specifications,
+  whole,
   words,
 } from '../row-fields';
 
@@ -104,4 +109,13 @@ export const FINISH_ROWS = [
     z.strictObject({ fromIn: inches(1), inspect: z.enum(['before_and_after', 'before', 'before_or_after']) }),
     { rising: 'fromIn' },
   ),
+  replaceable(
+    PASSIVATION_BATHS,
+    z.strictObject({
+      ...{ acid: z.enum(['nitric', 'citric']), number: whole(1, 20), percent: span(percent()) },
+      ...{ dichromatePercent: percent().exactOptional(), rangeF: span(fahrenheit()) },
+      ...{ leastMin: minutes(), saltSprayHours: hours() },
+    }),
+  ),
+  replaceable(PASSIVATION_TESTS, z.strictObject({ practice: z.enum(['A', 'B', 'C', 'D']), says: words() })),
 ];

@@ -57,11 +57,8 @@ const PLANTS: Readonly<Record<string, Plant>> = {
     truth.lines.length > 1 ? { ...truth, lines: truth.lines.slice(1) } : null,
   revision_mismatch: ({ truth }) =>
     withLine(truth, (line) => ({ ...line, rev: line.rev === 'B' ? 'D' : 'B' })),
-  // Beside rejects one more accepted is a sum that does not add up, which has a code of its own.
   quantity_mismatch: ({ truth }) =>
-    (truth.lines[0]?.qty_rejected ?? 0) > 0
-      ? null
-      : withLine(truth, (line) => ({ ...line, qty_accepted: (line.qty_accepted ?? 0) + 1 })),
+    withLine(truth, (line) => ({ ...line, qty_accepted: (line.qty_accepted ?? 0) + 1 })),
   old_spec_revision: ({ truth }) =>
     /^[B-Z]$/.test(truth.specification_revision ?? '')
       ? {

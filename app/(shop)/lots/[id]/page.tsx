@@ -3,6 +3,7 @@ import type { Metadata } from 'next';
 import { ask, Prefetched, readOnServer } from '@/app/_kit/prefetch';
 import { LotScreen } from '@/components/lots/lot-screen';
 import { getLotEndpoint, listMovementsEndpoint } from '@/lib/lots/endpoints';
+import { getTablesInForceEndpoint } from '@/lib/reference/endpoints';
 import { getMeEndpoint } from '@/lib/session/endpoints';
 import { readId } from '@/app/(shop)/lots/search';
 
@@ -19,6 +20,7 @@ export default async function LotPage({ params }: Props) {
     <Prefetched
       queries={[
         ask(getMeEndpoint, {}),
+        ask(getTablesInForceEndpoint, {}),
         ask(getLotEndpoint, { lotId }),
         ask(listMovementsEndpoint, { lotId }),
       ]}

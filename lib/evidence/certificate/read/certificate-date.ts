@@ -31,7 +31,19 @@ function isLikelyOnly({ isDayOrderShown }: Paper, raw: string): boolean {
 function candidatesOn(paper: Paper): Candidate<string | null>[] {
   const asked = paper.answers.flatMap((answer) => fromAnswer(paper, answer));
   if (asked.some(({ trust }) => trust > 0.6)) return asked;
-  return [...asked, ...standingAlone(paper)];
+  return [...asked, ...standingAlone(paper), ...inSentences(paper)];
+}
+
+/** "our certificate of conformity no. 26-118, dated 7 March 2026", over the end of a line too. */
+function inSentences(paper: Paper): Candidate<string | null>[] {
+  return paper.paragraphs.flatMap((paragraph) =>
+    daysIn(paragraph.text).flatMap((found): Candidate<string | null>[] => {
+      const spot = spotIn(paragraph, found.start, found.end);
+      const before = paragraph.text.slice(Math.max(0, found.start - 90), found.start);
+      if (!spot || !NUMBERED_AND_DATED.test(before)) return [];
+      return [{ value: dayOf(found, paper.dayOrder), spot, trust: 0.65 }];
+    }),
+  );
 }
 
 function fromAnswer(paper: Paper, answer: Answer): Candidate<string | null>[] {

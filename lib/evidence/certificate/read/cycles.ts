@@ -89,7 +89,7 @@ function asked(paper: Paper, process: Process | null): Observation[] {
     const goesOn = key === 'time_out' && begun !== null && answer.order - begun.order < 2100;
     const step = stepOf({ ...answer, key }, process) ?? (goesOn ? (begun?.step ?? null) : null);
     if (step && (key === 'bake_start' || key === 'time_in')) begun = { step, order: answer.order };
-    if (!step) return [];
+    if (!step || isTimeOfDay(answer, paper)) return [];
     for (const { passage, how } of answer.values) {
       const attributes = cycleAttributesIn(
         passage,
@@ -112,6 +112,14 @@ function asked(paper: Paper, process: Process | null): Observation[] {
     return [];
   });
 }
+
+/** "Time" alone, beside a column of days, is when and not how long: "Date 04/07/2026 | Time 10:17". */
+const isTimeOfDay = (answer: Answer, paper: Paper): boolean =>
+  answer.key === 'minutes' &&
+  /^(?:time|zeit|heure|hora|ora)$/.test(answer.words) &&
+  /^\s*\d{1,2}:\d\d\s*$/.test(textOf(answer)) &&
+  answer.row !== null &&
+  paper.answers.some(({ row, key }) => row === answer.row && key === 'date');
 
 const textOf = ({ values }: Answer): string => values[0]?.passage.text ?? '';
 

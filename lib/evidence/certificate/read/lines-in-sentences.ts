@@ -1,13 +1,14 @@
 import { passageFrom, type Passage } from '../../layout/passage';
 import { annealed, countIn, partIn, readingAt, type Reading } from './codes';
 import { beginsWithDay } from './identity';
-import type { ReadLine } from './lines';
+import type { ReadLine } from './line-cells';
 import type { Paper } from './paper';
 
 const SENTENCE_TRUST = 0.8;
 
+/** Behind a word for it, or counted: "53 off DX1377-2 issue E". */
 const PART =
-  /\b(?:p\/?n\.?|part\s*(?:numbers?|no\.?|nos\.?|#)|parts?|articles?|components?|items?(?=:)|drawing|dwg\.?|teile?-?(?:nr\.?|nummer)|r[eé]f(?:[eé]rence)?\.?)\s*:?\s*(?=[A-Z0-9./-]*\d)/giu;
+  /\b(?:p\/?n\.?|part\s*(?:numbers?|no\.?|nos\.?|#)|parts?|articles?|components?|items?(?=:)|drawing|dwg\.?|teile?-?(?:nr\.?|nummer)|r[eé]f(?:[eé]rence)?\.?)\s*:?\s*(?=[A-Z0-9./-]*\d)|(?<=(?<![\p{L}\d.,/-])\d[\d,]*\s*(?:off|x|×|pcs?\.?|pieces?|ea\.?)\s+(?:of\s+)?)(?=[A-Z0-9./-]*\d[A-Z0-9./-]*,?\s+(?:rev|iss(?:ue)?|lot)\b)/giu;
 const COUNTS = {
   accepted: [
     /(?<![\p{L}\d.,/-])(\d{1,3}(?:,\d{3})+|\d+)\s*(?:\(\w+\)\s*)?(?:pcs?\.?|pieces?|parts?|ea\.?|units?)?\s*(?:were\s+|was\s+|are\s+|have been\s+)?(?:found\s+)?(?:accepted|acceptable|conforming|passed|good|acc\.|angenommen|accept[eé]es?|aceptadas?)/iu,
@@ -19,7 +20,7 @@ const COUNTS = {
   ],
   quantity: [
     /\b(?:qty|quantity|menge|quantit[eé]|cantidad)\.?\s*(?:of\s+)?[:=]?\s*(\d[\d,]*)/iu,
-    /(?<![\p{L}\d.,/-])(\d{1,3}(?:,\d{3})+|\d+)\)?\s*(?:\(\w+\)\s*)?(?:pcs?\b\.?|pieces?\b|ea\b\.?|each\b|units?\b|parts?\b|st(?:ü|u)ck\b|pi[eè]ces\b|piezas\b)/iu,
+    /(?<![\p{L}\d.,/-])(\d{1,3}(?:,\d{3})+|\d+)\)?\s*(?:\(\w+\)\s*)?(?:pcs?\b\.?|pieces?\b|ea\b\.?|each\b|off\b|units?\b|parts?\b|st(?:ü|u)ck\b|pi[eè]ces\b|piezas\b)/iu,
   ],
 } as const;
 

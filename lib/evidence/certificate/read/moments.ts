@@ -11,7 +11,7 @@ export interface FoundMoment {
 
 const D = String.raw`[\dOoIl|]`;
 const CLOCK = new RegExp(
-  String.raw`(?<![\d:.,])(?:(${D}{1,2})\s?[:h]\s?(${D}{2})(?::${D}{2})?\s*([ap])?(?:\.?m\.?)?(?:\s*(?:hrs?\b|h\b|uhr\b))?|(${D}{1,2})\s*([ap])\.?m\.?\b|([012]${D})([0-5]${D})\s*(?:hrs?\b|h\b|uhr\b)|kl\.?\s*(\d{1,2})[.:](\d{2}))(?![\d:])`,
+  String.raw`(?<![\d:.,])(?:(${D}{1,2})\s?[:h]\s?(${D}{2})(?!\s*min)(?::${D}{2})?\s*([ap])?(?:\.?m\.?)?(?:\s*(?:hrs?\b|h\b|uhr\b))?|(${D}{1,2})\s*([ap])\.?m\.?\b|([012]${D})([0-5]${D})\s*(?:hrs?\b|h\b|uhr\b)|kl\.?\s*(\d{1,2})[.:](\d{2}))(?![\d:])`,
   'giu',
 );
 

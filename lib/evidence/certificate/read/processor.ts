@@ -18,6 +18,9 @@ const TRADE =
   /\b(?:heat[- ]?treat(?:ing|ers?|ment)?|thermal|metallurg\w*|plating|platers?|metal\s+(?:finishing|treating|processing)|finishing|finishers|coatings?|anodi[sz](?:ing|ers)|surface\s+\w+|ndt|ndi|nde|inspection\s+(?:services?|labs?)|testing|laborator(?:y|ies)|labs?|process(?:ing|ors)|aero(?:space)?|industries|technolog(?:y|ies)|services|works|h[aä]rterei|galvanik|oberfl[aä]chen\w*|w[aä]rmebehandlung|traitements?(?:\s+\w+)?|furnace|treaters)\b/iu;
 const TITLE =
   /\b(?:certificate|certification|certificat|certified|report|conformance|conformity|compliance|record|statement|zeugnis|bescheinigung|pr[uü]fbericht|werkszeugnis|proc[eè]s|page|copy|original|form|traveler|purchase order|results?|process details|remarks|requirements?|subject|re:)\b/iu;
+/** How a mail begins. */
+const GREETING =
+  /^(?:hello|hi|dear|good (?:morning|day|afternoon|evening)|to whom|guten tag|hallo|bonjour|hej)\b/iu;
 const ADDRESS =
   /\b(?:street|st|avenue|ave|road|rd|drive|dr|blvd|lane|ln|way|suite|unit|p\.?o\.? box|stra(?:ß|ss)e|str|rue|industrial park|tel|phone|fax|www|http|e-?mail)\b\.?|@|\b[A-Z]{2}\s+\d{5}\b|^\d/iu;
 
@@ -66,7 +69,7 @@ function letterhead(sheet: Sheet, customers: readonly Box[]): Candidate<string>[
       if ((label?.marked ?? false) || (label?.whole ?? false) || underCustomer(segment, line, customers))
         return [];
       const name = nameIn(segment);
-      if (!name || TITLE.test(name.value)) return [];
+      if (!name || TITLE.test(name.value) || GREETING.test(name.value)) return [];
       const trust = weigh({
         name: name.value,
         index,
@@ -100,9 +103,13 @@ function weigh({ name, index, line, sheet, big, tallest }: Weighed): number {
   const size = big > 1.25 && top ? 0.2 : 0;
   const head = tallest && top && big > 1.25 ? 0.15 : 0;
   if (firm === 0 && !(tallest && top && big > 1.2) && index > 0) return 0;
-  if (!top && !foot) return LEGAL.test(name) ? 0.1 : 0;
+  // Under the name of who signed a mail.
+  if (!top && !foot) return LEGAL.test(name) ? 0.1 : isAlone(line) && TRADE.test(name) ? 0.05 : 0;
   return Math.min(0.95, firm + first + size + head + (foot ? 0.05 : 0.1));
 }
+
+const isAlone = ({ segments }: Line): boolean =>
+  segments.length === 1 && /^\p{Lu}[^.:;!?]*$/u.test(segments[0]?.text ?? '');
 
 /** In the block under "Customer", "Sold to", "Ship to", or beside it. */
 function underCustomer(segment: Segment, line: Line, customers: readonly Box[]): boolean {

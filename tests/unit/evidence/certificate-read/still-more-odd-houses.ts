@@ -216,4 +216,94 @@ part | 20-118-1 | B | 19 | 1 | 4130 STEEL | L12
 part | 20-118-2 | B | 20 | 0 | 4130 STEEL | L12
 `,
   },
+  {
+    name: 'mail in prose',
+    page: `
+Hello,
+
+Please take this as our certificate of conformity no. HT86383, dated 7 March
+2026, for your order PO-26-393 (your batch B-0598, our job 3473). In the box
+are:
+
+* 53 off DX1377-2 issue E, lot L42
+* 110 off WA5582-4 issue A, lot L407
+
+Process was stress relieving to AMS 2759/11 Rev A. Stress relieving was 1 h
+15 min at 621 °C, from 28 Feb 2026 06:35 until 28 Feb 2026 07:50.
+
+Shout if anything is missing from the box.
+
+/s/ Ines Calder
+
+Ines Calder, Quality Engineer
+Wintergreen Thermal
+77 Industrial Park Dr
+Tel. 01632 960550 (ext. 31)
+`,
+    told: `
+processor: Wintergreen Thermal
+certificate_number: HT86383
+certificate_date: 2026-03-07
+purchase_order: PO-26-393
+batch: B-0598
+process: stress_relief
+specification: AMS 2759/11
+specification_revision: A
+class_type: null
+quench_delay_s: null
+plating_end: null
+bake_start: null
+bake_end: null
+signature_present: true
+conformance_statement: false
+part | DX1377-2 | E | 53 | - | - | L42
+part | WA5582-4 | A | 110 | - | - | L407
+cycle | stress_relief | 621 | C | 2026-02-28T06:35 | 2026-02-28T07:50 | 75
+`,
+  },
+  {
+    name: 'headings of two storeys',
+    page: `
+FAIRWATER PLATING GMBH                                              PROCESS CERTIFICATION REPORT
+
+Certificate: C-4428      Certificate date: 04/16/2026     Order: PO-7054       Shop order: 283975
+Process: CAD PLATE       Specification: AMS-QQ-P-416 Rev F      Class/Cond: Type II Class 2
+
+       PART                                MATERIAL                         QUANTITY
+Ln   Number        Rev   Name       Description      Lot       Received   Accepted   Rejected
+1    335288-91     D     BRACKET    4340 STEEL       20293     119        118        1
+
+           CYCLE                        SOAK START              SOAK END             TOTAL
+Operation     Equip.    Set °F      Date          Time      Date          Time       Time
+BAKE          F8        375         04/07/2026    10:17     04/08/2026    09:17      23.0 HRS
+
+Plating completed: 04/07/2026 07:05
+Deposit thickness: 0.43, 0.33 mil
+
+The articles of this report are certified to have been processed in accordance with the specification.
+
+Approved by
+     R. Marlow, Quality Engineer
+`,
+    told: `
+processor: FAIRWATER PLATING GMBH
+certificate_number: C-4428
+certificate_date: 2026-04-16
+purchase_order: PO-7054
+batch: null
+process: cadmium_plate
+specification: AMS-QQ-P-416
+specification_revision: F
+class_type: Type II Class 2
+quench_delay_s: null
+plating_end: 2026-04-07T07:05
+bake_start: 2026-04-07T10:17
+bake_end: 2026-04-08T09:17
+signature_present: false
+conformance_statement: true
+part | 335288-91 | D | 118 | 1 | 4340 STEEL | 20293
+cycle | embrittlement_relief | 375 | F | 2026-04-07T10:17 | 2026-04-08T09:17 | 1380
+readings | thickness | mil | 0.43, 0.33
+`,
+  },
 ];
