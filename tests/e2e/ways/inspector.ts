@@ -28,8 +28,8 @@ export async function prove(
   const certificates = await page.request.get(`/api/certificates?batchId=${batchId}`);
   const { rows } = (await certificates.json()) as { rows: { id: string }[] };
   await inspector.goTo(`/certificates/${rows[0]?.id ?? ''}`);
-  await inspector.type(page.getByLabel('Certificate number'), `SF-${String(Date.now()).slice(-6)}`);
-  await inspector.type(page.getByLabel('Date on it'), dayIn(0));
+  await inspector.type(page.getByLabel('Certificate number', { exact: true }), `SF-${String(Date.now()).slice(-6)}`);
+  await inspector.type(page.getByLabel('Date on it', { exact: true }), dayIn(0));
   await inspector.key('Tab');
   const open = page.locator('[id^="row-"]');
   await inspector.press(open.first());
