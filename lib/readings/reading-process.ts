@@ -23,7 +23,7 @@ import type { ReadingAnswer, ReadingRequest } from './reading-request';
  * A process of its own for reading files: whatever a file does to it, the worker lives on and starts another. It stands
  * behind everything else that wants the machine, so that pages are answered while scans are read.
  */
-setPriority(constants.priority.PRIORITY_BELOW_NORMAL);
+setPriority(constants.priority.PRIORITY_LOW);
 
 // One for all files: starting it takes longer than reading a page.
 const recogniser = makeRecogniser();
