@@ -10,6 +10,22 @@ const ADD = ['select', 'insert'] as const;
 const KEEP = ['select', 'insert', 'update'] as const;
 const EDIT = ['select', 'insert', 'update', 'delete'] as const;
 
+const ENTRY_OF_A_TABLE = [
+  'id',
+  'shop_id',
+  'table_id',
+  'title',
+  'edition',
+  'clause',
+  'rows',
+  'entered_by',
+  'entered_by_name',
+  'superseded_at',
+  'withdrawn_at',
+  'withdrawn_by',
+  'created_at',
+];
+
 /** The shop's side. Append-only tables have no update and no delete; balances are the ledger's alone. */
 export const SHOP_GRANTS: Record<string, readonly Verb[] | Columns> = {
   shops: ['select', 'update'],
@@ -19,36 +35,8 @@ export const SHOP_GRANTS: Record<string, readonly Verb[] | Columns> = {
   equipment: KEEP,
   // Rows of an entry never change; it is only followed by another or withdrawn.
   reference_tables: {
-    select: [
-      'id',
-      'shop_id',
-      'table_id',
-      'title',
-      'edition',
-      'clause',
-      'rows',
-      'entered_by',
-      'entered_by_name',
-      'superseded_at',
-      'withdrawn_at',
-      'withdrawn_by',
-      'created_at',
-    ],
-    insert: [
-      'id',
-      'shop_id',
-      'table_id',
-      'title',
-      'edition',
-      'clause',
-      'rows',
-      'entered_by',
-      'entered_by_name',
-      'superseded_at',
-      'withdrawn_at',
-      'withdrawn_by',
-      'created_at',
-    ],
+    select: ENTRY_OF_A_TABLE,
+    insert: ENTRY_OF_A_TABLE,
     update: ['superseded_at', 'withdrawn_at', 'withdrawn_by'],
   },
   counters: KEEP,
