@@ -1,11 +1,19 @@
+import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { createElement } from 'react';
 import { renderToStaticMarkup } from 'react-dom/server';
 import { expect, test } from 'vitest';
 
 import { AsQuenchedNote } from '@/components/reference/as-quenched-note';
+import { queryKeyOf } from '@/lib/api/query-key';
+import { getTablesInForce } from '@/lib/reference/contract';
 
-const note = (alloy: string, condition: string | null) =>
-  renderToStaticMarkup(createElement(AsQuenchedNote, { alloy, condition }));
+/** As a shop without editions of its own is told. */
+function note(alloy: string, condition: string | null): string {
+  const client = new QueryClient();
+  client.setQueryData(queryKeyOf(getTablesInForce, {}), { own: [] });
+  const element = createElement(AsQuenchedNote, { alloy, condition });
+  return renderToStaticMarkup(createElement(QueryClientProvider, { client }, element));
+}
 
 test.each(['AQ', 'W'])(
   '2024 that comes back in %s keeps soft 15 min, and the clock knows the alloy',

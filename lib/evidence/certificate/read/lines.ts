@@ -1,4 +1,4 @@
-import { type Answer, type AnswerValue } from './answers';
+import type { Answer, AnswerValue } from './answers';
 import { readingAt } from './codes';
 import type { Paper } from './paper';
 import { WRITERS, type ReadCell, type ReadLine } from './line-cells';

@@ -103,8 +103,9 @@ function weigh({ name, index, line, sheet, big, tallest }: Weighed): number {
   const size = big > 1.25 && top ? 0.2 : 0;
   const head = tallest && top && big > 1.25 ? 0.15 : 0;
   if (firm === 0 && !(tallest && top && big > 1.2) && index > 0) return 0;
+  if (!top && !foot && LEGAL.test(name)) return 0.1;
   // Under the name of who signed a mail.
-  if (!top && !foot) return LEGAL.test(name) ? 0.1 : isAlone(line) && TRADE.test(name) ? 0.05 : 0;
+  if (!top && !foot) return isAlone(line) && TRADE.test(name) ? 0.05 : 0;
   return Math.min(0.95, firm + first + size + head + (foot ? 0.05 : 0.1));
 }
 
