@@ -7,7 +7,7 @@ import { SOAK_TIMES } from '@/lib/trade/tables/soak-times';
 import { SOLUTION_TEMPERATURES } from '@/lib/trade/tables/solution-temperatures';
 
 import { Answer, NoAnswer } from './answer';
-import { apartWords, unplacedWords } from '@/lib/reference/load-words';
+import { APART_WORDS, unplacedWords } from '@/lib/reference/load-words';
 import { SourceLine } from './source-line';
 import type { Bench } from './use-bench';
 
@@ -119,7 +119,7 @@ function Apart({ apart }: { apart: readonly KeptApart[] }) {
             <strong>
               {one.join(', ')} and {other.join(', ')}
             </strong>
-            : {apartWords(reason)}
+            : {APART_WORDS[reason]}
           </li>
         ))}
       </ul>

@@ -1,8 +1,8 @@
 import { QUENCH_DELAYS } from '@/lib/trade/tables/quench-delays';
 import { SOAK_TIMES } from '@/lib/trade/tables/soak-times';
+import { APART_WORDS } from '@/lib/reference/load-words';
 
 import type { Check, CheckedLine, CheckFacts } from './check';
-import { APART_WORDS } from './apart-words';
 import type { Finding } from './finding';
 import { groupedBy } from './grouped-by';
 import { loadsOfBatch, type LoadsOfBatch } from './loads-of-batch';

@@ -1,7 +1,7 @@
 import { computedMassOf } from '@/lib/parts/computed-mass';
 import type { BatchTables } from '@/lib/reference/batch-tables';
+import { APART_WORDS } from '@/lib/reference/load-words';
 
-import { APART_WORDS } from './apart-words';
 import type { CheckedLine } from './check';
 import type { LoadPlan, PlannedLoad } from './load-contract';
 import { loadsOfBatch, soakAlone, type LoadOfLines } from './loads-of-batch';

@@ -1,7 +1,7 @@
 import type { BatchTables } from '@/lib/reference/batch-tables';
 import type { KeptApart } from '@/lib/trade/heat-treat/load-plan';
+import { APART_WORDS } from '@/lib/reference/load-words';
 
-import { APART_WORDS } from './apart-words';
 import { groupedBy } from './grouped-by';
 import { kindOf, loadsOfBatch, type LoadLine, type LoadsOfBatch, type NotPlanned } from './loads-of-batch';
 import { notPlannedWords } from './not-planned-words';

@@ -3,19 +3,20 @@ import type { LoadPlan } from '@/lib/trade/heat-treat/load-plan';
 type Apart = LoadPlan['apart'][number]['reason'];
 type Unplaced = LoadPlan['unplaced'][number]['reason'];
 
-const APART: Record<Apart, string> = {
-  process_differs: 'One is solution treated, the other only aged.',
-  medium_differs: 'One is heated in air, the other in salt.',
-  quench_differs: 'They are quenched differently.',
-  temperatures_do_not_meet: 'Their solution temperatures do not meet.',
-  meet_only_above_melting_risk: 'Their temperatures meet only where one of them may begin to melt.',
-  overlap_narrower_than_furnace: 'Their temperatures meet in less than the furnace keeps to.',
-  ageing_differs: 'They are aged differently.',
-  clad_would_soak_too_long: 'The thick one needs a longer soak than the thin clad one may have.',
-  fits_but_planned_apart: 'These two could share; with the rest it would take no load fewer.',
+/** Why lines do not share a furnace load. */
+export const APART_WORDS: Record<Apart, string> = {
+  process_differs: 'they ask for different processes',
+  medium_differs: 'one is heated in air, one in salt',
+  quench_differs: 'they are quenched differently',
+  temperatures_do_not_meet: 'their solution temperatures do not meet',
+  meet_only_above_melting_risk: 'their solution temperatures meet only where one of them may melt',
+  overlap_narrower_than_furnace: 'their solution temperatures meet in less than a furnace keeps to',
+  ageing_differs: 'they are aged differently',
+  clad_would_soak_too_long: 'clad sheet would soak longer than it may beside the thicker section',
+  fits_but_planned_apart: 'they could share; with what else is here it would take no load fewer',
 };
 
-const UNPLACED: Record<Exclude<Unplaced, keyof typeof APART>, string> = {
+const UNPLACED: Record<Exclude<Unplaced, Apart>, string> = {
   alloy_not_in_table: 'the tables do not have this alloy',
   form_not_in_table: 'the tables do not have this form of the alloy',
   no_range_in_table: 'the tables have no solution temperature for it',
@@ -24,10 +25,8 @@ const UNPLACED: Record<Exclude<Unplaced, keyof typeof APART>, string> = {
   no_ageing_cycle_in_table: 'the tables have no ageing to this condition',
 };
 
-export const apartWords = (reason: Apart): string => APART[reason];
-
 /** Why no load is made for a line; it goes after the name of the line. */
 export const unplacedWords = (reason: Unplaced): string =>
   reason in UNPLACED
     ? UNPLACED[reason as keyof typeof UNPLACED]
-    : `the tables contradict themselves about it (${APART[reason as Apart].replace(/\.$/, '').toLowerCase()})`;
+    : `the tables contradict themselves about it (${APART_WORDS[reason as Apart]})`;

@@ -1,4 +1,4 @@
-import { APART_WORDS } from '@/lib/batches/apart-words';
+import { APART_WORDS } from '@/lib/reference/load-words';
 import type { CheckedLine } from '@/lib/batches/check';
 import { loadsAsSet, type NumberedLoad } from '@/lib/batches/loads-as-set';
 import { loadsOfBatch } from '@/lib/batches/loads-of-batch';

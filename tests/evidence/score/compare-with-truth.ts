@@ -1,6 +1,25 @@
 import type { StatedCertificate } from '@/lib/evidence/certificate/certificate';
 import type { Truth } from '../generate/story';
 
+/** What a certificate states once. */
+export const SCALARS = [
+  'processor',
+  'certificate_number',
+  'certificate_date',
+  'purchase_order',
+  'batch',
+  'process',
+  'specification',
+  'specification_revision',
+  'class_type',
+  'quench_delay_s',
+  'plating_end',
+  'bake_start',
+  'bake_end',
+  'signature_present',
+  'conformance_statement',
+] as const;
+
 export interface Judged {
   /** Without the index: `lines.rev`. */
   readonly field: string;
@@ -31,23 +50,6 @@ export function judge(truth: Truth, read: StatedCertificate): Judged[] {
       outcome,
     };
   };
-  const SCALARS = [
-    'processor',
-    'certificate_number',
-    'certificate_date',
-    'purchase_order',
-    'batch',
-    'process',
-    'specification',
-    'specification_revision',
-    'class_type',
-    'quench_delay_s',
-    'plating_end',
-    'bake_start',
-    'bake_end',
-    'signature_present',
-    'conformance_statement',
-  ] as const;
   return [
     ...SCALARS.map((field) => one(field, truth[field], read[field])),
     ...linesOf(truth, read, one),

@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest';
 
 import { groupsOf, type TypedLine } from '@/components/reference/load-lines';
-import { apartWords, unplacedWords } from '@/lib/reference/load-words';
+import { APART_WORDS, unplacedWords } from '@/lib/reference/load-words';
 
 const LINE: TypedLine = { name: 'a', alloy: '2024', thicknessMm: 1.6, clad: true, to: 'T42' };
 const WORK = { form: 'sheet', medium: 'air', quench: 'cold water' } as const;
@@ -17,7 +17,7 @@ test('a line without a thickness is left out', () => {
 });
 
 test('reasons are sentences', () => {
-  expect(apartWords('meet_only_above_melting_risk')).toMatch(/melt/);
+  expect(APART_WORDS.meet_only_above_melting_risk).toMatch(/melt/);
   expect(unplacedWords('thicker_than_table')).toBe('it is thicker than the soak table goes');
   expect(unplacedWords('overlap_narrower_than_furnace')).toMatch(/contradict themselves/);
 });

@@ -146,10 +146,10 @@ function steppedAt(
     gap?.[0].length ?? 0,
     /^[\s\-–—,/:]*/.exec(text.slice(at + step.end))?.[0].length ?? 0,
   ]) {
-    const any = phraseAt(plain, at + step.end + skip);
+    const said = phraseAt(plain, at + step.end + skip);
     // A finish is a coating, but of a step it is the end.
-    const ends = any?.phrase.key === 'process' && plain.startsWith('finish', at + step.end + skip);
-    const found = any && ends ? { ...any, phrase: { ...any.phrase, key: 'time_out' as const } } : any;
+    const ends = said?.phrase.key === 'process' && plain.startsWith('finish', at + step.end + skip);
+    const found = said && ends ? { ...said, phrase: { ...said.phrase, key: 'time_out' as const } } : said;
     if (found && ATTRIBUTES.has(found.phrase.key)) return { ...found, step: step.step };
   }
   return null;

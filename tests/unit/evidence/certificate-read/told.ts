@@ -1,4 +1,5 @@
 import type { StatedCertificate } from '@/lib/evidence/certificate/certificate';
+import { SCALARS } from '@/tests/evidence/score/compare-with-truth';
 
 export interface House {
   readonly name: string;
@@ -9,31 +10,15 @@ export interface House {
 
 type Some<T> = { readonly [Key in keyof T]?: T[Key] | undefined };
 
-const PLAIN = [
-  'processor',
-  'certificate_number',
-  'certificate_date',
-  'purchase_order',
-  'batch',
-  'process',
-  'specification',
-  'specification_revision',
-  'class_type',
-  'quench_delay_s',
-  'plating_end',
-  'bake_start',
-  'bake_end',
-  'signature_present',
-  'conformance_statement',
-] as const;
-
 const cells = (...values: readonly unknown[]): string =>
   values.map((value) => String(value ?? '-')).join(' | ');
 
 /** What a certificate states, a line for each fact, part, cycle and series of readings. */
 export function told(stated: Some<Omit<StatedCertificate, 'facts'>>): string[] {
   return [
-    ...PLAIN.flatMap((field) => (stated[field] === undefined ? [] : [`${field}: ${String(stated[field])}`])),
+    ...SCALARS.flatMap((field) =>
+      stated[field] === undefined ? [] : [`${field}: ${String(stated[field])}`],
+    ),
     ...(stated.lines ?? []).map((line) =>
       cells(
         'part',
